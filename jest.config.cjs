@@ -1,0 +1,41 @@
+const { createCjsPreset } = require('jest-preset-angular/presets');
+
+const swc = (parser) => [
+  '@swc/jest',
+  { jsc: { target: 'es2022', parser, keepClassNames: true }, module: { type: 'commonjs' }, sourceMaps: 'inline', swcrc: false },
+];
+
+const node = (name) => ({
+  displayName: name,
+  rootDir: __dirname,
+  testEnvironment: 'node',
+  testMatch: [`<rootDir>/${name}/**/*.spec.ts`],
+  transform: {
+    '^.+\\.ts$': swc({ syntax: 'typescript', decorators: true }),
+    'node_modules/(icosphere|pdfjs-dist)/.+\\.m?js$': swc({ syntax: 'ecmascript' }),
+  },
+  transformIgnorePatterns: ['node_modules/(?!(icosphere|pdfjs-dist)/)'],
+});
+
+const onDatabase = (name) => ({
+  ...node(name),
+  globalSetup: '<rootDir>/test/database/jest-set-up.mjs',
+  globalTeardown: '<rootDir>/test/database/jest-tear-down.mjs',
+});
+
+module.exports = {
+  maxWorkers: 2,
+  projects: [
+    {
+      ...createCjsPreset({ tsconfig: '<rootDir>/frontend/tsconfig.spec.json' }),
+      transformIgnorePatterns: ['node_modules/(?!(.*\\.mjs$|@angular/common/locales/.*\\.js$))'],
+      displayName: 'frontend',
+      rootDir: __dirname,
+      testMatch: ['<rootDir>/frontend/src/**/*.spec.ts'],
+      setupFilesAfterEnv: ['<rootDir>/frontend/src/test/setup-jest.ts'],
+    },
+    onDatabase('backend'),
+    node('shared'),
+    onDatabase('test'),
+  ],
+};

@@ -1,0 +1,55 @@
+import * as z from 'zod';
+import type { Complaint } from '#shared/problems/complaint';
+import type { WordCode, WordValues } from '#shared/words/word-code';
+
+type Issue = z.core.$ZodIssue;
+
+/** What a schema's own rule says when it fails: a code of the catalogue with its values (pass it as the `error` of a refinement). */
+export const complain = (code: WordCode, values: WordValues = {}) => ({ params: { code, values }, error: code });
+
+const plain = (code: WordCode, values: WordValues = {}): Pick<Complaint, 'code' | 'values'> => ({ code, values });
+
+function tooSmall(issue: Extract<Issue, { code: 'too_small' }>) {
+  const minimum = Number(issue.minimum);
+  if (issue.origin === 'string') return minimum === 1 ? plain('entry-missing') : plain('entry-too-short', { minimum });
+  if (issue.origin === 'array') return plain('entry-too-few', { minimum });
+  return issue.inclusive ? plain('entry-too-small', { minimum }) : plain('entry-not-above', { minimum });
+}
+
+function tooBig(issue: Extract<Issue, { code: 'too_big' }>) {
+  const maximum = Number(issue.maximum);
+  if (issue.origin === 'string') return plain('entry-too-long', { maximum });
+  if (issue.origin === 'array') return plain('entry-too-many', { maximum });
+  return issue.inclusive ? plain('entry-too-large', { maximum }) : plain('entry-not-below', { maximum });
+}
+
+function worded(issue: Issue): Pick<Complaint, 'code' | 'values'> {
+  switch (issue.code) {
+    case 'custom': {
+      const own = issue.params as { code?: WordCode; values?: WordValues } | undefined;
+      return plain(own?.code ?? 'entry-wrong-form', own?.values ?? {});
+    }
+    case 'too_small':
+      return tooSmall(issue);
+    case 'too_big':
+      return tooBig(issue);
+    case 'invalid_type':
+      if (issue.expected === 'int') return plain('entry-not-whole');
+      return plain(issue.input === undefined || issue.input === null || issue.input === '' ? 'entry-missing' : 'entry-wrong-kind');
+    case 'invalid_format':
+      return plain(issue.format === 'email' ? 'entry-not-email' : 'entry-wrong-form');
+    case 'unrecognized_keys':
+      return plain('entry-unknown');
+    default:
+      return plain('entry-not-offered');
+  }
+}
+
+/** Every complaint of a failed parse, worded by code, in the order of the fields; an unknown key is complained of at its own path. */
+export function complaintsOf(error: z.core.$ZodError): Complaint[] {
+  return error.issues.flatMap((issue) => {
+    const path = issue.path.map((part) => (typeof part === 'symbol' ? String(part) : part));
+    const paths = issue.code === 'unrecognized_keys' ? issue.keys.map((key) => [...path, key]) : [path];
+    return paths.map((at) => ({ path: at, ...worded(issue) }));
+  });
+}

@@ -1,0 +1,2 @@
+export const accounts = {
+} as const;

@@ -1,0 +1,2 @@
+export const buildups = {
+} as const;

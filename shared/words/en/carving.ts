@@ -1,0 +1,2 @@
+export const carving = {
+} as const;

@@ -1,0 +1,2 @@
+export const documents = {
+} as const;

@@ -1,0 +1,2 @@
+export const drying = {
+} as const;

@@ -1,0 +1,2 @@
+export const estimates = {
+} as const;

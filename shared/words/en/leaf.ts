@@ -1,0 +1,2 @@
+export const leaf = {
+} as const;

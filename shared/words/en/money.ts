@@ -1,0 +1,2 @@
+export const money = {
+} as const;

@@ -1,0 +1,2 @@
+export const units = {
+} as const;

@@ -1,0 +1,36 @@
+import IntlMessageFormat from 'intl-messageformat';
+import type { Catalogue, WordCode, WordValues } from '#shared/words/word-code';
+
+/** How a reader wants figures written: their locale, units and currency. Made by `formatsFor` of `units`. */
+export interface ValueFormats {
+  readonly locale: string;
+  /** `mm`, `mm2`, `minor`, `hours`, `minutes`, `percent`, `celsius` …: a figure with its unit, as text. */
+  readonly write: (unit: string, figure: number) => string;
+}
+
+const messages = new Map<string, IntlMessageFormat>();
+
+function messageFor(text: string, locale: string): IntlMessageFormat {
+  const key = `${locale}\n${text}`;
+  const known = messages.get(key);
+  if (known) return known;
+  const made = new IntlMessageFormat(text, locale, undefined, { ignoreTag: true });
+  messages.set(key, made);
+  return made;
+}
+
+const unitOf = (name: string): string | undefined => /_([a-zµ0-9]+)$/.exec(name)?.[1];
+
+function written(values: WordValues, formats: ValueFormats): Record<string, string | number> {
+  const out: Record<string, string | number> = {};
+  for (const [name, value] of Object.entries(values)) {
+    const unit = unitOf(name);
+    out[name] = typeof value === 'number' && unit ? formats.write(unit, value) : value;
+  }
+  return out;
+}
+
+/** Words a code with its values in a language and a reader's formats; a value named `girth_mm` is written as a length, and so on. */
+export function say(catalogue: Catalogue, formats: ValueFormats): (code: WordCode, values?: WordValues) => string {
+  return (code, values = {}) => String(messageFor(catalogue[code], formats.locale).format(written(values, formats)));
+}
