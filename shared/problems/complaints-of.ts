@@ -35,7 +35,9 @@ function worded(issue: Issue): Pick<Complaint, 'code' | 'values'> {
       return tooBig(issue);
     case 'invalid_type':
       if (issue.expected === 'int') return plain('entry-not-whole');
-      return plain(issue.input === undefined || issue.input === null || issue.input === '' ? 'entry-missing' : 'entry-wrong-kind');
+      return plain(
+        issue.input === undefined || issue.input === null || issue.input === '' ? 'entry-missing' : 'entry-wrong-kind',
+      );
     case 'invalid_format':
       return plain(issue.format === 'email' ? 'entry-not-email' : 'entry-wrong-form');
     case 'unrecognized_keys':

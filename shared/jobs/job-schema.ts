@@ -1,0 +1,33 @@
+import * as z from 'zod';
+import { idEntry, lineEntry, nameEntry, textEntry } from '#shared/problems/entry-schema';
+
+/** Where a job stands. `sent`, `accepted` and `declined` follow from its issues; the others are set by hand. */
+export const jobStates = ['open', 'sent', 'accepted', 'declined', 'finished'] as const;
+export type JobState = (typeof jobStates)[number];
+
+/** Whether the base is made or an old one is worked on: an old one brings its own cautions. */
+export const jobKinds = ['new', 'restoration'] as const;
+
+/** What a person enters of a job. */
+export const jobContentSchema = z.strictObject({
+  title: nameEntry(),
+  clientId: idEntry,
+  kind: z.enum(jobKinds),
+  reference: lineEntry(80),
+  site: lineEntry(200),
+  note: textEntry(),
+});
+export type JobContent = z.infer<typeof jobContentSchema>;
+
+export const jobSchema = jobContentSchema.extend({
+  id: z.uuid(),
+  version: z.int(),
+  number: z.string(),
+  state: z.enum(jobStates),
+  clientName: z.string(),
+  changedAt: z.string(),
+});
+export type Job = z.infer<typeof jobSchema>;
+
+/** The orders a list of jobs can stand in. */
+export const jobOrders = ['changed', 'number', 'title'] as const;
