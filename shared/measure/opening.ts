@@ -1,14 +1,9 @@
 import type { FlatShape } from '#shared/measure/flat-shape';
+import type { MeasuredShape } from '#shared/measure/measured-shape';
 
-/** An opening whose area is simply given. */
-export interface GivenFace {
-  readonly kind: 'given';
-  readonly area_mm2: number;
-}
-
-/** What is cut out of one member, so many times: a flat face or a given area. Fluting of a face does not matter here. */
+/** What is cut out of each of a member's identical pieces, so many times: a flat shape, or an area somebody gives. */
 export interface Opening {
   readonly id: string;
-  readonly face: FlatShape | GivenFace;
+  readonly shape: FlatShape | MeasuredShape;
   readonly count: number;
 }

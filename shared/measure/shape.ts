@@ -6,6 +6,8 @@ import type { MouldingShape } from '#shared/measure/moulding-shape';
 import type { SolidShape } from '#shared/measure/solid-shape';
 import type { TurnedShape } from '#shared/measure/turned-shape';
 
+export type { FlatShape };
+
 /** The shape of a member, told apart by `kind`; every length a plain number of mm, what was typed being kept elsewhere. */
 export type Shape = FlatShape | MouldingShape | TurnedShape | LegShape | SolidShape | BandShape | MeasuredShape;
 
