@@ -1,0 +1,111 @@
+import * as z from 'zod';
+import type { EstimateSettings, ExtraLine } from '#shared/estimates/settings';
+import { complain } from '#shared/problems/complaints-of';
+import {
+  decimalEntry,
+  idEntry,
+  itemIdEntry,
+  lineEntry,
+  nameEntry,
+  percentEntry,
+  signedDecimalEntry,
+  textEntry,
+} from '#shared/problems/entry-schema';
+
+export const climateSchema = z.strictObject({
+  temperature_celsius: z.number().min(-10).max(45),
+  humidity_percent: z.number().min(0).max(100),
+});
+
+const anyExtra = {
+  id: idEntry,
+  name: nameEntry(120),
+  taxCategoryId: itemIdEntry,
+  memberId: idEntry.nullable(),
+  alternativeId: idEntry.nullable(),
+};
+
+const percentText = decimalEntry.refine((text) => Number(text) <= 100, complain('entry-too-large', { maximum: 100 }));
+
+export const extraLineSchema = z.discriminatedUnion('kind', [
+  z.strictObject({
+    ...anyExtra,
+    kind: z.literal('labour'),
+    gradeId: itemIdEntry,
+    hours: z.number().min(0).max(100_000),
+    work: z.enum(['making', 'sample', 'packing', 'fitting', 'other']),
+  }),
+  z.strictObject({ ...anyExtra, kind: z.literal('bought-in'), cost: decimalEntry }),
+  z.strictObject({
+    ...anyExtra,
+    kind: z.literal('timber'),
+    volume_dm3: z.number().min(0).max(1e6),
+    price_per_dm3: decimalEntry,
+    waste_percent: z.number().min(0).max(900),
+  }),
+  z.strictObject({
+    ...anyExtra,
+    kind: z.literal('paid-quantity'),
+    rule: nameEntry(200),
+    quantity: decimalEntry,
+    unit: nameEntry(20),
+    price: decimalEntry,
+  }),
+  z.strictObject({ ...anyExtra, kind: z.literal('insurance'), percent: percentText, value: decimalEntry.nullable() }),
+  z.strictObject({ ...anyExtra, kind: z.literal('price'), price: signedDecimalEntry }),
+]) satisfies z.ZodType<ExtraLine>;
+
+const profitSchema = z
+  .strictObject({ way: z.enum(['margin', 'mark-up']), percent: decimalEntry })
+  .refine((profit) => profit.way === 'mark-up' || Number(profit.percent) < 100, {
+    ...complain('entry-not-below', { maximum: 100 }),
+    path: ['percent'],
+  });
+
+const discountSchema = z
+  .strictObject({ way: z.enum(['percent', 'amount']), amount: decimalEntry })
+  .refine((discount) => discount.way === 'amount' || Number(discount.amount) <= 100, {
+    ...complain('entry-too-large', { maximum: 100 }),
+    path: ['amount'],
+  });
+
+const stagesSchema = z
+  .strictObject({
+    deposit_percent: percentEntry,
+    parts: z.array(z.strictObject({ id: idEntry, name: nameEntry(80), percent: percentEntry })).max(24),
+    retention_percent: percentEntry,
+  })
+  .refine(
+    (stages) =>
+      stages.parts.length === 0 || Math.abs(stages.parts.reduce((sum, part) => sum + part.percent, 0) - 100) < 1e-9,
+    {
+      ...complain('stages-not-whole'),
+      path: ['parts'],
+    },
+  );
+
+/** What is entered of an estimate as a whole. */
+export const settingsSchema = z.strictObject({
+  title: nameEntry(120),
+  introduction: textEntry(),
+  place: z.enum(['indoors', 'outdoors', 'damp']),
+  restoration: z.boolean(),
+  shop: climateSchema,
+  site: climateSchema,
+  presentation: z.enum(['members', 'kinds']),
+  profit: profitSchema.nullable(),
+  contingency: z.strictObject({ way: z.enum(['share', 'risk']), percent: percentText }).nullable(),
+  discount: discountSchema.nullable(),
+  taxCategoryId: itemIdEntry,
+  extras: z.array(extraLineSchema).max(100),
+  alternatives: z
+    .array(z.strictObject({ id: idEntry, name: nameEntry(120), group: lineEntry(80), note: textEntry(1000) }))
+    .max(24),
+  stages: stagesSchema,
+  validity_days: z.int().min(1).max(730),
+  leafValidity_days: z.int().min(1).max(730),
+  included: textEntry(),
+  excluded: textEntry(),
+  terms: textEntry(8000),
+  seed: z.int().min(1).max(4_294_967_295),
+}) satisfies z.ZodType<EstimateSettings>;
