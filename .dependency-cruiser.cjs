@@ -5,7 +5,6 @@
 const features = require('./shared/features.json');
 
 const kernelSize = 7;
-const kernel = features.slice(0, kernelSize);
 const beyondKernel = features.slice(kernelSize);
 
 const anyOf = (names) => `(${names.join('|')})`;
@@ -20,137 +19,122 @@ const worker = '-worker\\.ts$';
 const serverEntry = '^backend/src/[^/]+\\.ts$';
 const pageEntry = '^frontend/src/(app/)?[^/]+\\.ts$';
 
-const never = (name, comment, from, to) => ({ name, comment, severity: 'error', from, to });
+const never = (name, rule) => ({ name, severity: 'error', ...rule });
 
 const order = features
   .slice(0, -1)
   .map((feature, index) =>
-    never(
-      `${feature} imports only what stands before it in the list of features`,
-      'A reader who follows the list never meets a folder that needs one they have not seen.',
-      { path: onAnySide([feature]) },
-      { path: onAnySide(features.slice(index + 1)) },
-    ),
+    never(`${feature} imports only what stands before it in the list of features`, {
+      comment: 'A reader who follows the list never meets a folder that needs one they have not seen.',
+      from: { path: onAnySide([feature]) },
+      to: { path: onAnySide(features.slice(index + 1)) },
+    }),
   );
 
 const sides = [
-  never(
-    'The shared side imports neither the server nor the page',
-    'What both sides import must run on both.',
-    { path: '^shared/' },
-    { path: '^(backend|frontend|seeders)/' },
-  ),
-  never(
-    'The page never imports the server',
-    'They meet in shared alone: server code would travel to the browser.',
-    { path: '^frontend/' },
-    { path: '^(backend|seeders)/' },
-  ),
-  never(
-    'The server never imports the page',
-    'They meet in shared alone.',
-    { path: '^(backend|seeders)/' },
-    { path: '^frontend/' },
-  ),
-  never(
-    'The page uses nothing of Node',
-    'The browser has no such modules.',
-    { path: '^frontend/src/', pathNot: [spec, testSupport] },
-    { dependencyTypes: ['core'] },
-  ),
-  never(
-    'The platform, the core and the common widgets know the kernel only',
-    'They carry every feature, so they may depend on none.',
-    { path: '^(backend/src/platform|frontend/src/app/(core|ui))/' },
-    { path: onAnySide(beyondKernel) },
-  ),
+  never('The shared side imports neither the server nor the page', {
+    comment: 'What both sides import must run on both.',
+    from: { path: '^shared/' },
+    to: { path: '^(backend|frontend|seeders)/' },
+  }),
+  never('The page never imports the server', {
+    comment: 'They meet in shared alone: server code would travel to the browser.',
+    from: { path: '^frontend/' },
+    to: { path: '^(backend|seeders)/' },
+  }),
+  never('The server never imports the page', {
+    comment: 'They meet in shared alone.',
+    from: { path: '^(backend|seeders)/' },
+    to: { path: '^frontend/' },
+  }),
+  never('The page uses nothing of Node', {
+    comment: 'The browser has no such modules.',
+    from: { path: '^frontend/src/', pathNot: [spec, testSupport] },
+    to: { dependencyTypes: ['core'] },
+  }),
+  never('The platform, the core and the common widgets know the kernel only', {
+    comment: 'They carry every feature, so they may depend on none.',
+    from: { path: '^(backend/src/platform|frontend/src/app/(core|ui))/' },
+    to: { path: onAnySide(beyondKernel) },
+  }),
 ];
 
 const doors = [
-  never(
-    'Server features meet at their door, index.ts',
-    'What stands behind the door may change without asking anybody.',
-    { path: `^backend/src/${anyOf(features)}/` },
-    {
+  never('Server features meet at their door, index.ts', {
+    comment: 'What stands behind the door may change without asking anybody.',
+    from: { path: `^backend/src/${anyOf(features)}/` },
+    to: {
       path: `^backend/src/${anyOf(features)}/`,
       pathNot: ['^backend/src/$1/', `^backend/src/${anyOf(features)}/index\\.ts$`],
     },
-  ),
-  never(
-    'Page features meet at their door, index.ts',
-    'What stands behind the door may change without asking anybody.',
-    { path: `^frontend/src/app/${anyOf(features)}/` },
-    {
+  }),
+  never('Page features meet at their door, index.ts', {
+    comment: 'What stands behind the door may change without asking anybody.',
+    from: { path: `^frontend/src/app/${anyOf(features)}/` },
+    to: {
       path: `^frontend/src/app/${anyOf(features)}/`,
       pathNot: ['^frontend/src/app/$1/', `^frontend/src/app/${anyOf(features)}/index\\.ts$`],
     },
-  ),
-  never(
-    'What joins the features goes through their doors',
-    'The entries stand outside the list, not outside the walls.',
-    { path: [serverEntry, pageEntry], pathNot: spec },
-    {
+  }),
+  never('What joins the features goes through their doors', {
+    comment: 'The entries stand outside the list, not outside the walls.',
+    from: { path: [serverEntry, pageEntry], pathNot: spec },
+    to: {
       path: `^(backend/src|frontend/src/app)/${anyOf(features)}/`,
       pathNot: ['/index\\.ts$', `^frontend/src/app/(${features.join('|')})/\\1-routes\\.ts$`],
     },
-  ),
-  never(
-    'The demonstration goes through the doors of the features',
-    'So that demonstration data obeys every rule of the services.',
-    { path: '^seeders/' },
-    { path: `^backend/src/${anyOf(features)}/`, pathNot: '/index\\.ts$' },
-  ),
-  never(
-    'A door of the page leads to widgets, never to pages',
-    'Pages are reached by their route, loaded when it is opened.',
-    { path: `^frontend/src/app/${anyOf(features)}/index\\.ts$` },
-    { path: '-page\\.ts$' },
-  ),
-  never(
-    'Nobody imports what joins the features',
-    'The entries import the features; a way back would be a cycle in all but name.',
-    { path: `^(shared|backend/src|frontend/src/app)/[^/]+/`, pathNot: spec },
-    {
+  }),
+  never('The demonstration goes through the doors of the features', {
+    comment: 'So that demonstration data obeys every rule of the services.',
+    from: { path: '^seeders/' },
+    to: { path: `^backend/src/${anyOf(features)}/`, pathNot: '/index\\.ts$' },
+  }),
+  never('A door of the page leads to widgets, never to pages', {
+    comment: 'Pages are reached by their route, loaded when it is opened.',
+    from: { path: `^frontend/src/app/${anyOf(features)}/index\\.ts$` },
+    to: { path: '-page\\.ts$' },
+  }),
+  never('Nobody imports what joins the features', {
+    comment: 'The entries import the features; a way back would be a cycle in all but name.',
+    from: { path: `^(shared|backend/src|frontend/src/app)/[^/]+/`, pathNot: spec },
+    to: {
       path: [
         '^backend/src/(app|main)\\.ts$',
         '^frontend/src/(main|app/(app|app-routes|app-config))\\.ts$',
         '^seeders/',
       ],
     },
-  ),
-  never(
-    'Only the server and the tests read the list of all endpoints',
-    'It pulls in every feature: the page imports the endpoints it calls.',
-    { pathNot: [serverEntry, '^(backend/bin|test)/', spec] },
-    { path: '^shared/endpoints\\.ts$' },
-  ),
-  never(
-    'Nothing that runs imports from the tests',
-    'Support for tests is not part of the product.',
-    { pathNot: [spec, testSupport] },
-    { path: [testSupport, spec] },
-  ),
+  }),
+  never('Only the server and the tests read the list of all endpoints', {
+    comment: 'It pulls in every feature: the page imports the endpoints it calls.',
+    from: { pathNot: [serverEntry, '^(backend/bin|test)/', spec] },
+    to: { path: '^shared/endpoints\\.ts$' },
+  }),
+  never('Nothing that runs imports from the tests', {
+    comment: 'Support for tests is not part of the product.',
+    from: { pathNot: [spec, testSupport] },
+    to: { path: [testSupport, spec] },
+  }),
 ];
 
 const techniques = [
-  never(
-    'Express stays in routes and platform/http',
-    'Services are called by requests, tasks and seeders alike, so they know nothing of the web.',
-    { pathNot: ['-routes\\.ts$', '^backend/src/platform/http/', '^backend/src/(app|main)\\.ts$', spec, testSupport] },
-    { path: installed(['express', 'express-serve-static-core']) },
-  ),
-  never(
-    'Sequelize stays in repositories, models, migrations and platform/database',
-    'One place decides how rows are read, always with the workshop first.',
-    {
+  never('Express stays in routes and platform/http', {
+    comment: 'Services are called by requests, tasks and seeders alike, so they know nothing of the web.',
+    from: {
+      pathNot: ['-routes\\.ts$', '^backend/src/platform/http/', '^backend/src/(app|main)\\.ts$', spec, testSupport],
+    },
+    to: { path: installed(['express', 'express-serve-static-core']) },
+  }),
+  never('Sequelize stays in repositories, models, migrations and platform/database', {
+    comment: 'One place decides how rows are read, always with the workshop first.',
+    from: {
       pathNot: ['-(repository|model)\\.ts$', '(^|/)migrations/', '^backend/src/platform/database/', spec, testSupport],
     },
-    { path: installed(['sequelize', 'mariadb', 'umzug']) },
-  ),
-  never(
-    'Zod stays in schemas, endpoints, problems, platform/config, platform/http and the core of the page',
-    'A calculation is given what a schema has let through; it does not ask again.',
-    {
+    to: { path: installed(['sequelize', 'mariadb', 'umzug']) },
+  }),
+  never('Zod stays in schemas, endpoints, problems, platform/config, platform/http and the core of the page', {
+    comment: 'A calculation is given what a schema has let through; it does not ask again.',
+    from: {
       pathNot: [
         schemaOrEndpoints,
         '^shared/problems/',
@@ -160,78 +144,72 @@ const techniques = [
         testSupport,
       ],
     },
-    { path: installed(['zod']) },
-  ),
-  never(
-    'A route asks its service, never the rows',
-    'Route, service, repository: one request is read in that order.',
-    { path: '^backend/src/.+-routes\\.ts$' },
-    { path: '-(repository|model)\\.ts$' },
-  ),
+    to: { path: installed(['zod']) },
+  }),
+  never('A route asks its service, never the rows', {
+    comment: 'Route, service, repository: one request is read in that order.',
+    from: { path: '^backend/src/.+-routes\\.ts$' },
+    to: { path: '-(repository|model)\\.ts$' },
+  }),
 ];
 
 const calculators = [
-  never(
-    'A calculator imports other calculators and decimal.js, nothing else',
-    'The same figures on both sides, today and in ten years, from the same input.',
-    {
+  never('A calculator imports other calculators and decimal.js, nothing else', {
+    comment: 'The same figures on both sides, today and in ten years, from the same input.',
+    from: {
       path: calculator,
       pathNot: [spec, '^shared/problems/complaints-of\\.ts$', '^shared/words/say\\.ts$', '^shared/units/'],
     },
-    { pathNot: ['^shared/', installed(['decimal\\.js'])] },
-  ),
-  never(
-    'A calculator needs no schema',
-    'Schemas say what may be entered; calculators own the plain types they work on.',
-    { path: calculator, pathNot: [spec, '^shared/problems/'] },
-    { path: schemaOrEndpoints },
-  ),
-  never(
-    'A complaint is read from zod alone',
-    'complaints-of.ts words what a schema found, and needs no other package.',
-    { path: '^shared/problems/complaints-of\\.ts$' },
-    { pathNot: ['^shared/', installed(['zod'])] },
-  ),
-  never(
-    'Words are formatted by intl-messageformat alone',
-    'say.ts is the one place that turns a code into a sentence.',
-    { path: '^shared/words/say\\.ts$' },
-    { pathNot: ['^shared/', installed(['intl-messageformat', '@formatjs'])] },
-  ),
-  never(
-    'Units are named and converted by convert-units alone',
-    'It serves the metric conversions; everything across systems goes through exact factors.',
-    { path: '^shared/units/', pathNot: [spec, schemaOrEndpoints] },
-    { pathNot: ['^shared/', installed(['convert-units', 'decimal\\.js'])] },
-  ),
-  never(
-    'A worker imports calculators only',
-    'It carries no schema, no page and no database into its thread.',
-    { path: worker },
-    { pathNot: [calculator, '^(node:)?worker_threads$'] },
-  ),
+    to: { pathNot: ['^shared/', installed(['decimal\\.js'])] },
+  }),
+  never('A calculator needs no schema', {
+    comment: 'Schemas say what may be entered; calculators own the plain types they work on.',
+    from: { path: calculator, pathNot: [spec, '^shared/problems/'] },
+    to: { path: schemaOrEndpoints },
+  }),
+  never('A complaint is read from zod alone', {
+    comment: 'complaints-of.ts words what a schema found, and needs no other package.',
+    from: { path: '^shared/problems/complaints-of\\.ts$' },
+    to: { pathNot: ['^shared/', installed(['zod'])] },
+  }),
+  never('Words are formatted by intl-messageformat alone', {
+    comment: 'say.ts is the one place that turns a code into a sentence.',
+    from: { path: '^shared/words/say\\.ts$' },
+    to: { pathNot: ['^shared/', installed(['intl-messageformat', '@formatjs'])] },
+  }),
+  never('Units are named and converted by convert-units alone', {
+    comment: 'It serves the metric conversions; everything across systems goes through exact factors.',
+    from: { path: '^shared/units/', pathNot: [spec, schemaOrEndpoints] },
+    to: { pathNot: ['^shared/', installed(['convert-units', 'decimal\\.js'])] },
+  }),
+  never('A worker imports calculators only', {
+    comment: 'It carries no schema, no page and no database into its thread.',
+    from: { path: worker },
+    to: { pathNot: [calculator, '^(node:)?worker_threads$'] },
+  }),
 ];
 
 const everywhere = [
-  never('No import runs in a circle', 'Neither half of a circle can be read first.', {}, { circular: true }),
-  never(
-    'Every import leads somewhere',
-    'A path that does not resolve fails at the worst moment.',
-    {},
-    { couldNotResolve: true },
-  ),
-  never(
-    'Every package is named in package.json',
-    'A package that came along with another may leave with it.',
-    {},
-    { dependencyTypes: ['npm-no-pkg', 'npm-unknown'] },
-  ),
-  never(
-    'Nothing that runs needs a development package',
-    'The product is served without them.',
-    { path: '^(shared|backend/src|frontend/src|seeders)/', pathNot: [spec, testSupport] },
-    { dependencyTypes: ['npm-dev'], pathNot: '(^|/)node_modules/@types/' },
-  ),
+  never('No import runs in a circle', {
+    comment: 'Neither half of a circle can be read first.',
+    from: {},
+    to: { circular: true },
+  }),
+  never('Every import leads somewhere', {
+    comment: 'A path that does not resolve fails at the worst moment.',
+    from: {},
+    to: { couldNotResolve: true },
+  }),
+  never('Every package is named in package.json', {
+    comment: 'A package that came along with another may leave with it.',
+    from: {},
+    to: { dependencyTypes: ['npm-no-pkg', 'npm-unknown'] },
+  }),
+  never('Nothing that runs needs a development package', {
+    comment: 'The product is served without them.',
+    from: { path: '^(shared|backend/src|frontend/src|seeders)/', pathNot: [spec, testSupport] },
+    to: { dependencyTypes: ['npm-dev'], pathNot: '(^|/)node_modules/@types/' },
+  }),
 ];
 
 module.exports = {

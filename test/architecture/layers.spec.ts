@@ -1,18 +1,17 @@
 import features from '../../shared/features.json';
-import { plantedTree, type PlantedFiles, type PlantedTree } from './planted-tree';
+import { plantedTree, type PlantedFiles } from './planted-tree';
 import { runTool } from './run-tool';
 
-interface CruiseReport {
-  readonly summary: {
-    readonly violations: readonly { readonly from: string; readonly rule: { readonly name: string } }[];
-  };
-}
-
-interface Rule {
+interface Named {
   readonly name: string;
 }
 
-const rules = (require('../../.dependency-cruiser.cjs') as { forbidden: readonly Rule[] }).forbidden;
+interface CruiseReport {
+  readonly summary: {
+    readonly violations: readonly { readonly from: string; readonly rule: Named }[];
+    readonly ruleSetUsed: { readonly forbidden: readonly Named[] };
+  };
+}
 
 const packages = ['express', 'sequelize', 'zod', 'decimal.js', 'intl-messageformat', 'convert-units', 'fast-check'];
 
@@ -228,18 +227,18 @@ const copied = [
   'tsconfig.all.json',
   'shared/features.json',
 ];
-const cruised = ['frontend/src', 'backend', 'shared', 'seeders', 'test'];
+const folders = ['frontend/src', 'backend', 'shared', 'seeders', 'test'];
 
-function complaintsIn(tree: PlantedTree): string[] {
-  const args = ['--config', '.dependency-cruiser.cjs', '--output-type', 'json', ...cruised];
-  const report = runTool('dependency-cruiser/bin/dependency-cruise.mjs', args, tree.folder) as CruiseReport;
-  return report.summary.violations.map(({ from, rule }) => `${from}: ${rule.name}`);
-}
-
-function complaintsAbout(files: PlantedFiles): string[] {
+/** What the rules say about these files, and which rules there are. */
+function cruised(files: PlantedFiles) {
   const tree = plantedTree(copied, { ...installedPackages, ...files });
   try {
-    return complaintsIn(tree);
+    const args = ['--config', '.dependency-cruiser.cjs', '--output-type', 'json', ...folders];
+    const { summary } = runTool('dependency-cruiser/bin/dependency-cruise.mjs', args, tree.folder) as CruiseReport;
+    return {
+      complaints: summary.violations.map(({ from, rule }) => `${from}: ${rule.name}`),
+      ruleNames: summary.ruleSetUsed.forbidden.map(({ name }) => name),
+    };
   } finally {
     tree.remove();
   }
@@ -248,13 +247,14 @@ function complaintsAbout(files: PlantedFiles): string[] {
 describe('The rules of who may import whom', () => {
   const broken = Object.fromEntries(breaches.map(({ at, text }) => [at, text]));
   let complaints: readonly string[] = [];
+  let ruleNames: readonly string[] = [];
 
   beforeAll(() => {
-    complaints = complaintsAbout({ ...lawful, ...accomplices, ...broken });
+    ({ complaints, ruleNames } = cruised({ ...lawful, ...accomplices, ...broken }));
   }, 60_000);
 
   it('leave a tree that keeps them in peace', () => {
-    expect(complaintsAbout(lawful)).toEqual([]);
+    expect(cruised(lawful).complaints).toEqual([]);
   }, 60_000);
 
   it.each(breaches.map(({ rule, at }) => [rule, at]))('%s (%s)', (rule, at) => {
@@ -263,12 +263,12 @@ describe('The rules of who may import whom', () => {
 
   it('are each broken by at least one planted file', () => {
     const planted = new Set(breaches.map(({ rule }) => rule));
-    expect(rules.map(({ name }) => name).filter((name) => !planted.has(name))).toEqual([]);
+    expect(ruleNames.length).toBeGreaterThan(40);
+    expect(ruleNames.filter((name) => !planted.has(name))).toEqual([]);
   });
 
   it('have names that are sentences, each its own', () => {
-    const names = rules.map(({ name }) => name);
-    expect(new Set(names).size).toBe(names.length);
-    expect(names.filter((name) => name.split(' ').length < 4)).toEqual([]);
+    expect(new Set(ruleNames).size).toBe(ruleNames.length);
+    expect(ruleNames.filter((name) => name.split(' ').length < 4)).toEqual([]);
   });
 });
