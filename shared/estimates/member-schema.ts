@@ -57,7 +57,7 @@ export const memberContentSchema = z.strictObject({
   shape: shapeSchema,
   openings: few(openingSchema, 40),
   zones: few(zoneSchema, 24).refine(sharesFit, complain('zone-shares-over')),
-  ornaments: few(ornamentUseSchema, 60),
+  ornaments: few(ornamentUseSchema.safeExtend({ alternativeId: idEntry.nullable() }), 60),
   lot: lineEntry(60),
   note: textEntry(2000),
   typed: z

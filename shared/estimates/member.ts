@@ -38,6 +38,11 @@ export interface Zone {
   readonly alternativeId: string | null;
 }
 
+/** An ornament as a member carries it, in the base or in one alternative. */
+export interface MemberOrnament extends OrnamentUse {
+  readonly alternativeId: string | null;
+}
+
 /** What a person enters of one member; it is saved, undone and remembered as one. */
 export interface MemberContent {
   readonly pieceId: string;
@@ -49,7 +54,7 @@ export interface MemberContent {
   readonly shape: Shape;
   readonly openings: readonly Opening[];
   readonly zones: readonly Zone[];
-  readonly ornaments: readonly OrnamentUse[];
+  readonly ornaments: readonly MemberOrnament[];
   /** Name of the lot it is coated with; empty follows build-up and piece. */
   readonly lot: string;
   readonly note: string;

@@ -1,10 +1,5 @@
+import type { Climate } from '#shared/drying/climate';
 import type { DecimalText } from '#shared/money/decimal';
-
-/** Air of a room. */
-export interface Climate {
-  readonly temperature_celsius: number;
-  readonly humidity_percent: number;
-}
 
 /** One further line of an estimate: work or goods that no member carries. */
 export type ExtraLine = {
@@ -44,6 +39,8 @@ export interface Alternative {
   readonly name: string;
   readonly group: string;
   readonly note: string;
+  /** Base members, zones, ornaments and extra lines that fall away when it is chosen. */
+  readonly replaces: readonly string[];
 }
 
 /** One stage of payment: a share of the contract with what it waits for. */

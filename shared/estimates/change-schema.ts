@@ -1,0 +1,25 @@
+import * as z from 'zod';
+import { memberContentSchema, pieceContentSchema } from '#shared/estimates/member-schema';
+import { settingsSchema } from '#shared/estimates/settings-schema';
+import { idEntry, versionEntry } from '#shared/problems/entry-schema';
+
+/** One change of a draft: what it becomes (null: removed), and the version the person saw (0: there was none). */
+export const changeSchema = z.discriminatedUnion('kind', [
+  z.strictObject({
+    kind: z.literal('member'),
+    id: idEntry,
+    version: versionEntry,
+    content: memberContentSchema.nullable(),
+  }),
+  z.strictObject({
+    kind: z.literal('piece'),
+    id: idEntry,
+    version: versionEntry,
+    content: pieceContentSchema.nullable(),
+  }),
+  z.strictObject({ kind: z.literal('settings'), id: idEntry, version: versionEntry, content: settingsSchema }),
+]);
+export type Change = z.infer<typeof changeSchema>;
+
+/** Several changes kept together or not at all: paste, duplicate, mirror and reorder send many. */
+export const changesSchema = z.strictObject({ changes: z.array(changeSchema).min(1).max(500) });

@@ -1,0 +1,55 @@
+import * as z from 'zod';
+import { dayEntry, textEntry } from '#shared/problems/entry-schema';
+
+/** Where an issue stands with the client; only sent, accepted and declined are marked by hand. */
+export const issueStates = ['issued', 'sent', 'accepted', 'declined', 'replaced'] as const;
+export type IssueState = (typeof issueStates)[number];
+
+/** What a person says when issuing: a note, and whether a rate card no longer in force is meant. */
+export const issueRequestSchema = z.strictObject({
+  /** Version of the draft the person saw; somebody else's later change is not issued unseen. */
+  version: z.int().min(1),
+  note: textEntry(1000),
+  acceptsOldCard: z.boolean(),
+});
+
+export const issueMarkSchema = z.strictObject({
+  state: z.enum(['sent', 'accepted', 'declined']),
+  day: dayEntry,
+  note: textEntry(1000),
+});
+
+export const issueSummarySchema = z.strictObject({
+  id: z.uuid(),
+  estimateId: z.uuid(),
+  letter: z.string(),
+  state: z.enum(issueStates),
+  issuedAt: z.string(),
+  issuedBy: z.string(),
+  note: z.string(),
+  validUntil: z.string(),
+  leafValidUntil: z.string(),
+  markedOn: z.string().nullable(),
+  markNote: z.string(),
+  sha256: z.string(),
+});
+
+export const pricedIssueSummarySchema = issueSummarySchema.extend({
+  net_minor: z.int(),
+  tax_minor: z.int(),
+  gross_minor: z.int(),
+});
+export type IssueSummary = z.infer<typeof issueSummarySchema>;
+export type PricedIssueSummary = z.infer<typeof pricedIssueSummarySchema>;
+
+/** A line in which two issues (or an issue and the draft) differ. */
+export const lineDifferenceSchema = z.strictObject({
+  lineId: z.string(),
+  name: z.string(),
+  before_minor: z.int().nullable(),
+  after_minor: z.int().nullable(),
+});
+
+/** The papers of an issue; those with prices are not for the bench. */
+export const papers = ['estimate.pdf', 'estimate.xlsx', 'leaf-order.pdf', 'leaf-order.csv'] as const;
+export type Paper = (typeof papers)[number];
