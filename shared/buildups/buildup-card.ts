@@ -20,19 +20,19 @@ export interface Material {
   readonly bulk_kg_L: number | null;
 }
 
-/** One part of a recipe by volume; a part without material is water, and costs nothing. */
+/** One part of a recipe by volume; water has no material and costs nothing. */
 export interface RecipePart {
   readonly id: string;
   readonly name: string;
+  readonly role: 'glue' | 'water' | 'other';
   readonly materialId: string | null;
   readonly parts: number;
 }
 
-/** A mixture by volume. In a glue size the part called glue is the strength: parts of glue ÷ parts of water. */
+/** A mixture by volume; its batch is the sum of its parts. The strength of a size is parts of glue ÷ parts of water. */
 export interface Recipe {
   readonly id: string;
   readonly name: string;
-  readonly kind: 'size' | 'mixture';
   readonly parts: readonly RecipePart[];
 }
 
@@ -61,8 +61,6 @@ export interface BuildUpCard {
   readonly cleaning_hours_m2: Triple;
   readonly protectingEdge_hours_m: number;
   readonly setUp_hours: number;
-  /** The grade that protects edges; set-up goes to the grade of its step. */
-  readonly protectingGradeId: string;
   readonly spread: Triple;
   readonly productiveShare_percent: number;
   readonly workingDay_hours: number;

@@ -36,6 +36,7 @@ export const stepKinds = [
   'glaze',
   'varnish',
   'paint',
+  'protect-edge',
 ] as const;
 export type StepKind = (typeof stepKinds)[number];
 
@@ -68,12 +69,12 @@ export type Coats = Readonly<Record<CoatSurface, number>>;
 
 /**
  * How the hands-on time of a step is counted: hours per m² plan and coat (with the finish factors, those of smoothing, or none), by the
- * leaves laid, from the card's own triples, from the carving (recutting), or not at all (a step that only waits).
+ * leaves laid, from the card's own triples, from the carving (recutting), by the edge protected, or not at all (a step that only waits).
  */
 export type StepWork =
   | { readonly way: 'area'; readonly hours_m2: number; readonly factors: 'finish' | 'smoothing' | 'none' }
   | { readonly way: 'laying'; readonly part: 'first' | 'faulting' | 'second' }
-  | { readonly way: 'consolidating' | 'cleaning' | 'recutting' | 'waiting' };
+  | { readonly way: 'consolidating' | 'cleaning' | 'recutting' | 'edge' | 'waiting' };
 
 /** What one coat takes of a material, or of a recipe of the card, per m² of true surface; `share` is the share of the coats it serves (1 = all). */
 export type MaterialUse = (

@@ -1,3 +1,6 @@
+import type { RecuttingManner } from '#shared/carving/carving-card';
+import type { LayingWay } from '#shared/leaf/leaf-card';
+import type { LeafForm } from '#shared/leaf/leaf-product';
 import type { SurfaceFinish } from '#shared/measure/relief';
 
 /** Gross leaves (sheets, patches), pieces (lays) or metres (ribbon) of each laying of a zone, broken ones included, unrounded. */
@@ -9,20 +12,21 @@ export interface LayingCounts {
 
 /** How a zone is laid, and how much of it. */
 export interface ZoneLaying {
-  readonly way: 'sheets' | 'lays' | 'patches';
-  readonly product: 'loose' | 'transfer' | 'ribbon';
+  readonly way: LayingWay;
+  readonly form: LeafForm;
   readonly counts: LayingCounts;
 }
 
 /** What a build-up is worked on: a zone with all its identical members counted in, areas in mm², hours decimal. */
 export interface ZoneFacts {
   readonly id: string;
+  readonly pieceId: string;
   readonly buildUpId: string;
   /** Plan area (net, before relief) for hands-on work, and true area (with relief) for materials. */
   readonly plan_mm2: number;
   readonly true_mm2: number;
   readonly finish: SurfaceFinish;
-  readonly recutting: 'none' | 'usual' | 'french';
+  readonly recutting: RecuttingManner | null;
   /** Hours of recutting as the carving worked them; 0 where none. */
   readonly recutting_hours: number;
   readonly laying: ZoneLaying | null;
