@@ -1,4 +1,13 @@
+import * as passwords from '#shared/accounts/password-endpoints';
+import * as people from '#shared/accounts/people-endpoints';
+import * as sessions from '#shared/accounts/session-endpoints';
+import * as workshops from '#shared/accounts/workshop-endpoints';
 import type { Endpoint } from '#shared/actor/endpoint';
+import * as history from '#shared/audit/history-endpoints';
 
-/** Every endpoint of the application, in the order of the features. */
-export const endpoints: readonly Endpoint[] = [];
+const isEndpoint = (value: object): value is Endpoint => 'path' in value && 'method' in value;
+
+/** Every endpoint of the application, in the order of the features: whatever the endpoint files export as one. */
+export const endpoints: readonly Endpoint[] = [history, sessions, passwords, workshops, people].flatMap((file) =>
+  Object.values<object>(file).filter(isEndpoint),
+);

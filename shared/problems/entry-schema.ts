@@ -1,50 +1,49 @@
 import * as z from 'zod';
 import { complain } from '#shared/problems/complaints-of';
 
-/** The kinds of entry every feature uses: written once, so that a rule and its words are the same everywhere. */
+/** Control characters and the marks that turn the direction of text: they have no place in a name, and could forge a header or a log line. */
+const unseen = /[\u0000-\u001f\u007f-\u009f\u2028\u2029\u202a-\u202e\u2066-\u2069]/;
+const unseenButBreaks = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f\u202a-\u202e\u2066-\u2069]/;
 
-const hasNoControls = (text: string) => !/[\u0000-\u0008\u000b-\u001f\u007f]/.test(text);
-const hasNoLineBreaks = (text: string) => !/[\r\n\t]/.test(text);
-
-/** One line of text that must be filled in. */
-export const nameEntry = (maximum = 120) =>
+/** One line of text of 1 to `maximum` characters, trimmed, without control characters. */
+export const line = (maximum: number) =>
   z
     .string()
     .trim()
     .min(1)
     .max(maximum)
-    .refine((text) => hasNoControls(text) && hasNoLineBreaks(text), complain('entry-wrong-form'));
+    .refine((text) => !unseen.test(text), complain('entry-wrong-form'));
 
-/** One line of text that may be empty. */
-export const lineEntry = (maximum = 200) =>
+/** One line of text that may be left empty. */
+export const optionalLine = (maximum: number) =>
   z
     .string()
     .trim()
     .max(maximum)
-    .refine((text) => hasNoControls(text) && hasNoLineBreaks(text), complain('entry-wrong-form'));
+    .refine((text) => !unseen.test(text), complain('entry-wrong-form'));
 
-/** Text of several lines that may be empty. */
-export const textEntry = (maximum = 4000) =>
-  z.string().max(maximum).refine(hasNoControls, complain('entry-wrong-form'));
+/** Text of several lines that may be left empty, at most `maximum` characters. */
+export const paragraphs = (maximum: number) =>
+  z
+    .string()
+    .max(maximum)
+    .refine((text) => !unseenButBreaks.test(text), complain('entry-wrong-form'));
 
-export const idEntry = z.uuid();
-/** The id of an item of a rate card: a slug or a UUID. */
-export const itemIdEntry = z.string().regex(/^[a-z0-9][a-z0-9-]{0,63}$/);
-export const emailEntry = z.string().trim().toLowerCase().max(254).pipe(z.email());
-export const optionalEmailEntry = z.union([z.literal(''), emailEntry]);
+/** An id: a UUID in small letters. */
+export const identifier = z.uuid().regex(/^[0-9a-f-]{36}$/);
 
-/** A web address or mail link; anything but http, https and mailto is refused. */
-export const linkEntry = z
+/** An e-mail address in small letters, at most 254 characters (RFC 5321). */
+export const emailAddress = z.string().trim().toLowerCase().max(254).pipe(z.email());
+
+/** An address a page may link to: http, https or mailto only. */
+export const webAddress = z
   .string()
   .trim()
-  .max(500)
-  .refine((text) => text === '' || /^(https?:\/\/|mailto:)[^\s<>"']+$/i.test(text), complain('entry-not-link'));
+  .max(2_000)
+  .refine((text) => /^(https?:\/\/|mailto:)[^\s]+$/i.test(text) && URL.canParse(text), complain('entry-not-link'));
 
-export const dayEntry = z.iso.date();
-export const percentEntry = z.number().min(0).max(100);
-export const countEntry = z.int().min(1).max(10_000);
-/** A decimal amount as text, never negative, at most nine digits before and six after the sign. */
-export const decimalEntry = z.string().regex(/^\d{1,9}(\.\d{1,6})?$/);
-/** A decimal amount as text that may be negative. */
-export const signedDecimalEntry = z.string().regex(/^-?\d{1,9}(\.\d{1,6})?$/);
-export const versionEntry = z.int().min(0);
+/** An instant in UTC as ISO 8601 text. */
+export const instant = z.iso.datetime();
+
+/** The version a row carries, raised by each change. */
+export const version = z.int().min(1);
