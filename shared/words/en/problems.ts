@@ -30,8 +30,6 @@ export const problems = {
   'entry-not-whole': 'Whole numbers only.',
   'entry-not-email': 'This does not look like an e-mail address.',
   'entry-not-link': 'Only addresses that begin with http:, https: or mailto: are kept.',
-  'triple-low-above': 'Low must not be more than likely.',
-  'triple-high-below': 'High must not be less than likely.',
   'entry-wrong-form': 'This is not written in the form expected here.',
   'entry-twice': 'This is in the list already.',
   'entry-not-offered': 'Choose one of the values offered.',
