@@ -7,14 +7,6 @@ export interface HumidityPoint {
   readonly factor: number;
 }
 
-/** How a timber moves: change of width per width and point of moisture, quarter-sawn (CR) and plain-sawn (CT). */
-export interface TimberMovement {
-  readonly id: string;
-  readonly name: string;
-  readonly radial: number;
-  readonly tangential: number;
-}
-
 /** The working week hands-on work is laid into. */
 export interface WorkingWeek {
   readonly day_minutes: number;
@@ -22,7 +14,7 @@ export interface WorkingWeek {
   readonly productiveShare_percent: number;
 }
 
-/** The part of a rate card that holds drying: house factors, usual waits in working days, the shop's own air and week, timbers. */
+/** The part of a rate card that holds drying: house factors, usual waits in working days, the air of shop and site, the week. */
 export interface DryingCard {
   readonly shop: Climate;
   readonly site: Climate;
@@ -31,7 +23,6 @@ export interface DryingCard {
   readonly mostFactor: number;
   readonly holds_days: Readonly<Record<HoldPoint, number>>;
   readonly workingDays: number;
-  readonly timbers: readonly TimberMovement[];
   readonly moistureWarning_points: number;
   readonly jointWarning_mm: number;
 }
