@@ -1,0 +1,93 @@
+import { textOf } from '#shared/money/text-of';
+import { squareMillimetresPerSquareFoot, squareMillimetresPerSquareInch } from '#shared/units/exact-factors';
+import { lengthFigure } from '#shared/units/format-length';
+import { inMetric } from '#shared/units/metric';
+import type { Pen } from '#shared/units/pen';
+
+type Write = (figure: number) => string;
+
+function moneyWriter({ settings: { locale, currency, digits } }: Pen): Write {
+  const decimals = { minimumFractionDigits: digits, maximumFractionDigits: digits };
+  const format = new Intl.NumberFormat(locale, { style: 'currency', currency, numberingSystem: 'latn', ...decimals });
+  // A decimal text is formatted digit by digit; as a number, sums above 45 million million minor units could lose one.
+  const exact = (amount: number) => format.format(textOf(amount, digits) as unknown as number);
+  return (figure) => (Number.isSafeInteger(figure) ? exact(figure) : format.format(figure / 10 ** digits));
+}
+
+function percentWriter({ settings: { locale } }: Pen): Write {
+  const format = new Intl.NumberFormat(locale, { style: 'percent', maximumFractionDigits: 2, numberingSystem: 'latn' });
+  return (figure) => format.format(figure / 100);
+}
+
+/** Minutes as days, hours and minutes, leaving out what is nought: 45 min, 2 d 4 h. */
+function durationWriter({ worded }: Pen): Write {
+  return (figure) => {
+    const total = Math.round(Math.abs(figure));
+    const parts = [
+      [Math.floor(total / 1440), 'unit-days'],
+      [Math.floor((total % 1440) / 60), 'unit-hours'],
+      [total % 60, 'unit-minutes'],
+    ] as const;
+    const told = parts.filter(([count]) => count > 0).map(([count, code]) => worded(code, count, 0));
+    return `${figure < 0 && told.length > 0 ? '−' : ''}${told.join(' ') || worded('unit-minutes', 0, 0)}`;
+  };
+}
+
+const metricArea = ({ worded }: Pen): Write => {
+  return (area_mm2) =>
+    Math.abs(area_mm2) < 1e6
+      ? worded('unit-square-centimetres', inMetric(area_mm2, 'mm2', 'cm2'), Math.abs(area_mm2) < 1e4 ? 2 : 0)
+      : worded('unit-square-metres', inMetric(area_mm2, 'mm2', 'm2'), 2);
+};
+
+const imperialArea = ({ worded }: Pen): Write => {
+  return (area_mm2) =>
+    Math.abs(area_mm2) < squareMillimetresPerSquareFoot
+      ? worded('unit-square-inches', area_mm2 / squareMillimetresPerSquareInch, 1)
+      : worded('unit-square-feet', area_mm2 / squareMillimetresPerSquareFoot, 2);
+};
+
+function lengthWriter({ settings: { lengthUnit, locale }, withUnit }: Pen): Write {
+  return (length_mm) => {
+    const { figure, isExact } = lengthFigure(length_mm, lengthUnit, locale);
+    if (lengthUnit === 'mm') return withUnit('unit-mm', figure);
+    // In mm a worked figure is rounded as any other is; a fraction of an inch would look exact.
+    return `${isExact ? '' : '≈ '}${withUnit('unit-inches', figure)}`;
+  };
+}
+
+const massWriter = ({ worded }: Pen): Write => {
+  return (mass) =>
+    Math.abs(mass) < 1000 ? worded('unit-grams', mass) : worded('unit-kilograms', inMetric(mass, 'g', 'kg'), 2);
+};
+
+const volumeWriter = ({ worded }: Pen): Write => {
+  return (volume) =>
+    Math.abs(volume) < 1
+      ? worded('unit-millilitres', inMetric(volume, 'l', 'ml'), 1)
+      : worded('unit-litres', volume, 2);
+};
+
+/** How each unit a figure can carry is written with a reader's pen, by the ending of the value's name. */
+export function figureWriters(pen: Pen): Readonly<Record<string, Write>> {
+  const { worded, number, withUnit, settings } = pen;
+  return {
+    mm: lengthWriter(pen),
+    mm2: settings.lengthUnit === 'in' ? imperialArea(pen) : metricArea(pen),
+    minor: moneyWriter(pen),
+    percent: percentWriter(pen),
+    hours: (figure) => worded('unit-hours', figure, 2),
+    minutes: durationWriter(pen),
+    days: (figure) => worded('unit-whole-days', figure, 1),
+    celsius: (figure) => worded('unit-celsius', figure, 1),
+    µm: (figure) => worded('unit-micrometres', figure, 3),
+    grams: massWriter(pen),
+    litres: volumeWriter(pen),
+    leaves: (figure) => worded('unit-leaves', figure, 1),
+    booklets: (figure) => worded('unit-booklets', figure, 1),
+    packs: (figure) => worded('unit-packs', figure, 1),
+    pieces: (figure) => worded('unit-pieces', figure, 1),
+    factor: (figure) => withUnit('unit-factor', number(figure, 4, 2)),
+    divisor: (figure) => withUnit('unit-divisor', number(figure, 4, 2)),
+  };
+}

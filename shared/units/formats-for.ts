@@ -1,0 +1,14 @@
+import { figureWriters } from '#shared/units/figure-writers';
+import { penFor, type ReaderSettings } from '#shared/units/pen';
+import type { ValueFormats } from '#shared/words/say';
+
+/**
+ * How figures are written for a reader, by the ending of a value's name: mm, mm2, minor, hours, minutes, days, percent, celsius, µm, grams,
+ * litres, leaves, booklets, packs, pieces, factor, divisor; any other ending is a plain number. Decimals of money never come from Intl.
+ */
+export function formatsFor(settings: ReaderSettings): ValueFormats {
+  const pen = penFor(settings);
+  const writers = figureWriters(pen);
+  const plain = (figure: number) => pen.number(figure, 3);
+  return { locale: settings.locale, write: (unit, figure) => (writers[unit] ?? plain)(figure) };
+}

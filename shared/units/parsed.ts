@@ -1,0 +1,12 @@
+import type { WordCode, WordValues } from '#shared/words/word-code';
+
+/** What reading a typed entry gives: its value, or what to say about it. */
+export type Parsed<T> = ({ readonly ok: true } & Readonly<T>) | Unread;
+
+export interface Unread {
+  readonly ok: false;
+  readonly code: WordCode;
+  readonly values: WordValues;
+}
+
+export const unread = (code: WordCode, values: WordValues = {}): Unread => ({ ok: false, code, values });
