@@ -1,23 +1,23 @@
 import * as z from 'zod';
 import { memberContentSchema, pieceContentSchema } from '#shared/estimates/member-schema';
 import { settingsSchema } from '#shared/estimates/settings-schema';
-import { idEntry, versionEntry } from '#shared/problems/entry-schema';
+import { identifier, versionSeen } from '#shared/problems/entry-schema';
 
 /** One change of a draft: what it becomes (null: removed), and the version the person saw (0: there was none). */
 export const changeSchema = z.discriminatedUnion('kind', [
   z.strictObject({
     kind: z.literal('member'),
-    id: idEntry,
-    version: versionEntry,
+    id: identifier,
+    version: versionSeen,
     content: memberContentSchema.nullable(),
   }),
   z.strictObject({
     kind: z.literal('piece'),
-    id: idEntry,
-    version: versionEntry,
+    id: identifier,
+    version: versionSeen,
     content: pieceContentSchema.nullable(),
   }),
-  z.strictObject({ kind: z.literal('settings'), id: idEntry, version: versionEntry, content: settingsSchema }),
+  z.strictObject({ kind: z.literal('settings'), id: identifier, version: versionSeen, content: settingsSchema }),
 ]);
 export type Change = z.infer<typeof changeSchema>;
 

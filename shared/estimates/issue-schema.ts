@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { dayEntry, textEntry } from '#shared/problems/entry-schema';
+import { day, line, paragraphs } from '#shared/problems/entry-schema';
 
 /** Where an issue stands with the client; only sent, accepted and declined are marked by hand. */
 export const issueStates = ['issued', 'sent', 'accepted', 'declined', 'replaced'] as const;
@@ -9,14 +9,14 @@ export type IssueState = (typeof issueStates)[number];
 export const issueRequestSchema = z.strictObject({
   /** Version of the draft the person saw; somebody else's later change is not issued unseen. */
   version: z.int().min(1),
-  note: textEntry(1000),
+  note: paragraphs(1000),
   acceptsOldCard: z.boolean(),
 });
 
 export const issueMarkSchema = z.strictObject({
   state: z.enum(['sent', 'accepted', 'declined']),
-  day: dayEntry,
-  note: textEntry(1000),
+  day: day,
+  note: paragraphs(1000),
 });
 
 export const issueSummarySchema = z.strictObject({

@@ -8,37 +8,30 @@ import { zoneTakeSchema } from '#shared/measure/zone-take-schema';
 import { recuttingManners } from '#shared/carving/carving-card';
 import { layingWays } from '#shared/leaf/leaf-card';
 import { complain } from '#shared/problems/complaints-of';
-import {
-  countEntry,
-  idEntry,
-  itemIdEntry,
-  lineEntry,
-  nameEntry,
-  percentEntry,
-  textEntry,
-} from '#shared/problems/entry-schema';
+import { cardItemId, percentEntry } from '#shared/buildups/card-entry-schema';
+import { count, identifier, line, optionalLine, paragraphs } from '#shared/problems/entry-schema';
 
 const few = <S extends z.ZodType>(item: S, maximum: number) => z.array(item).max(maximum);
 
 export const zoneSchema = z.strictObject({
-  id: idEntry,
-  name: nameEntry(80),
+  id: identifier,
+  name: line(80),
   take: zoneTakeSchema,
   relief: z.enum(reliefs),
   finish: z.enum(finishes).nullable(),
-  buildUpId: itemIdEntry,
-  leafId: itemIdEntry.nullable(),
+  buildUpId: cardItemId,
+  leafId: cardItemId.nullable(),
   laying: z.strictObject({
     way: z.enum(['proposed', ...layingWays]),
     strips: z.int().min(1).max(8).nullable(),
     cuts: z.int().min(1).max(8).nullable(),
   }),
-  chosenStepIds: few(itemIdEntry, 40),
+  chosenStepIds: few(cardItemId, 40),
   burnished_percent: percentEntry.nullable(),
   painted_percent: percentEntry,
   recutting: z.enum(['none', ...recuttingManners]),
   protectedEdge_mm: z.number().min(0).max(1e6),
-  alternativeId: idEntry.nullable(),
+  alternativeId: identifier.nullable(),
 });
 
 const sharesFit = (zones: readonly z.infer<typeof zoneSchema>[]) =>
@@ -49,25 +42,25 @@ const sharesFit = (zones: readonly z.infer<typeof zoneSchema>[]) =>
 
 /** A member as it is entered; shares of its base zones come to 100 % at most. */
 export const memberContentSchema = z.strictObject({
-  pieceId: idEntry,
+  pieceId: identifier,
   place: z.number().min(-1e9).max(1e9),
-  name: nameEntry(80),
-  count: countEntry,
-  timberId: itemIdEntry,
+  name: line(80),
+  count: count,
+  timberId: cardItemId,
   shape: shapeSchema,
   openings: few(openingSchema, 40),
   zones: few(zoneSchema, 24).refine(sharesFit, complain('zone-shares-over')),
-  ornaments: few(ornamentUseSchema.safeExtend({ alternativeId: idEntry.nullable() }), 60),
-  lot: lineEntry(60),
-  note: textEntry(2000),
+  ornaments: few(ornamentUseSchema.safeExtend({ alternativeId: identifier.nullable() }), 60),
+  lot: optionalLine(60),
+  note: paragraphs(2000),
   typed: z
     .record(z.string().max(120), z.string().max(60))
     .refine((typed) => Object.keys(typed).length <= 400, complain('entry-too-many', { maximum: 400 })),
-  alternativeId: idEntry.nullable(),
+  alternativeId: identifier.nullable(),
 }) satisfies z.ZodType<MemberContent>;
 
 export const pieceContentSchema = z.strictObject({
-  name: nameEntry(120),
+  name: line(120),
   place: z.number().min(-1e9).max(1e9),
-  note: textEntry(2000),
+  note: paragraphs(2000),
 }) satisfies z.ZodType<PieceContent>;

@@ -1,16 +1,8 @@
 import * as z from 'zod';
 import type { EstimateSettings, ExtraLine } from '#shared/estimates/settings';
 import { complain } from '#shared/problems/complaints-of';
-import {
-  decimalEntry,
-  idEntry,
-  itemIdEntry,
-  lineEntry,
-  nameEntry,
-  percentEntry,
-  signedDecimalEntry,
-  textEntry,
-} from '#shared/problems/entry-schema';
+import { cardItemId, decimalEntry, percentEntry } from '#shared/buildups/card-entry-schema';
+import { identifier, line, optionalLine, paragraphs } from '#shared/problems/entry-schema';
 
 export const climateSchema = z.strictObject({
   temperature_celsius: z.number().min(-10).max(45),
@@ -18,12 +10,15 @@ export const climateSchema = z.strictObject({
 });
 
 const anyExtra = {
-  id: idEntry,
-  name: nameEntry(120),
-  taxCategoryId: itemIdEntry,
-  memberId: idEntry.nullable(),
-  alternativeId: idEntry.nullable(),
+  id: identifier,
+  name: line(120),
+  taxCategoryId: cardItemId,
+  memberId: identifier.nullable(),
+  alternativeId: identifier.nullable(),
 };
+
+/** A decimal amount as text that may be negative. */
+const signedDecimal = z.string().regex(/^-?\d{1,9}(\.\d{1,6})?$/);
 
 const percentText = decimalEntry.refine((text) => Number(text) <= 100, complain('entry-too-large', { maximum: 100 }));
 
@@ -31,7 +26,7 @@ export const extraLineSchema = z.discriminatedUnion('kind', [
   z.strictObject({
     ...anyExtra,
     kind: z.literal('labour'),
-    gradeId: itemIdEntry,
+    gradeId: cardItemId,
     hours: z.number().min(0).max(100_000),
     work: z.enum(['making', 'sample', 'packing', 'fitting', 'other']),
   }),
@@ -46,13 +41,13 @@ export const extraLineSchema = z.discriminatedUnion('kind', [
   z.strictObject({
     ...anyExtra,
     kind: z.literal('paid-quantity'),
-    rule: nameEntry(200),
+    rule: line(200),
     quantity: decimalEntry,
-    unit: nameEntry(20),
+    unit: line(20),
     price: decimalEntry,
   }),
   z.strictObject({ ...anyExtra, kind: z.literal('insurance'), percent: percentText, value: decimalEntry.nullable() }),
-  z.strictObject({ ...anyExtra, kind: z.literal('price'), price: signedDecimalEntry }),
+  z.strictObject({ ...anyExtra, kind: z.literal('price'), price: signedDecimal }),
 ]) satisfies z.ZodType<ExtraLine>;
 
 const profitSchema = z
@@ -72,7 +67,7 @@ const discountSchema = z
 const stagesSchema = z
   .strictObject({
     deposit_percent: percentEntry,
-    parts: z.array(z.strictObject({ id: idEntry, name: nameEntry(80), percent: percentEntry })).max(24),
+    parts: z.array(z.strictObject({ id: identifier, name: line(80), percent: percentEntry })).max(24),
     retention_percent: percentEntry,
   })
   .refine(
@@ -86,8 +81,8 @@ const stagesSchema = z
 
 /** What is entered of an estimate as a whole. */
 export const settingsSchema = z.strictObject({
-  title: nameEntry(120),
-  introduction: textEntry(),
+  title: line(120),
+  introduction: paragraphs(4000),
   place: z.enum(['indoors', 'outdoors', 'damp']),
   restoration: z.boolean(),
   shop: climateSchema,
@@ -96,16 +91,16 @@ export const settingsSchema = z.strictObject({
   profit: profitSchema.nullable(),
   contingency: z.strictObject({ way: z.enum(['share', 'risk']), percent: percentText }).nullable(),
   discount: discountSchema.nullable(),
-  taxCategoryId: itemIdEntry,
+  taxCategoryId: cardItemId,
   extras: z.array(extraLineSchema).max(100),
   alternatives: z
-    .array(z.strictObject({ id: idEntry, name: nameEntry(120), group: lineEntry(80), note: textEntry(1000) }))
+    .array(z.strictObject({ id: identifier, name: line(120), group: optionalLine(80), note: paragraphs(1000) }))
     .max(24),
   stages: stagesSchema,
   validity_days: z.int().min(1).max(730),
   leafValidity_days: z.int().min(1).max(730),
-  included: textEntry(),
-  excluded: textEntry(),
-  terms: textEntry(8000),
+  included: paragraphs(4000),
+  excluded: paragraphs(4000),
+  terms: paragraphs(8000),
   seed: z.int().min(1).max(4_294_967_295),
 }) satisfies z.ZodType<EstimateSettings>;

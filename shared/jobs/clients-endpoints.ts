@@ -1,10 +1,10 @@
 import * as z from 'zod';
 import { endpoint, sameForPriced } from '#shared/actor/endpoint';
 import { pageOf, pageQuery } from '#shared/actor/page-schema';
-import { idEntry } from '#shared/problems/entry-schema';
+import { identifier } from '#shared/problems/entry-schema';
 import { clientContentSchema, clientSchema } from '#shared/jobs/client-schema';
 
-const oneClient = z.strictObject({ clientId: idEntry });
+const oneClient = z.strictObject({ clientId: identifier });
 const answers = sameForPriced(clientSchema);
 
 export const listClients = endpoint({

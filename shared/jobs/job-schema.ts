@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { idEntry, lineEntry, nameEntry, textEntry } from '#shared/problems/entry-schema';
+import { identifier, line, optionalLine, paragraphs } from '#shared/problems/entry-schema';
 
 /** Where a job stands. `sent`, `accepted` and `declined` follow from its issues; the others are set by hand. */
 export const jobStates = ['open', 'sent', 'accepted', 'declined', 'finished'] as const;
@@ -10,12 +10,12 @@ export const jobKinds = ['new', 'restoration'] as const;
 
 /** What a person enters of a job. */
 export const jobContentSchema = z.strictObject({
-  title: nameEntry(),
-  clientId: idEntry,
+  title: line(120),
+  clientId: identifier,
   kind: z.enum(jobKinds),
-  reference: lineEntry(80),
-  site: lineEntry(200),
-  note: textEntry(),
+  reference: optionalLine(80),
+  site: optionalLine(200),
+  note: paragraphs(4000),
 });
 export type JobContent = z.infer<typeof jobContentSchema>;
 

@@ -1,10 +1,10 @@
 import * as z from 'zod';
 import { endpoint, sameForAll, sameForPriced } from '#shared/actor/endpoint';
 import { pageOf, pageQuery } from '#shared/actor/page-schema';
-import { idEntry } from '#shared/problems/entry-schema';
+import { identifier } from '#shared/problems/entry-schema';
 import { jobContentSchema, jobOrders, jobSchema, jobStates } from '#shared/jobs/job-schema';
 
-const oneJob = z.strictObject({ jobId: idEntry });
+const oneJob = z.strictObject({ jobId: identifier });
 
 export const listJobs = endpoint({
   name: 'listJobs',
@@ -15,7 +15,7 @@ export const listJobs = endpoint({
   query: z.strictObject({
     search: z.string().max(200).default(''),
     state: z.enum(jobStates).optional(),
-    clientId: idEntry.optional(),
+    clientId: identifier.optional(),
     order: z.enum(jobOrders).default('changed'),
     ...pageQuery,
   }),

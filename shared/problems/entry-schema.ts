@@ -40,10 +40,25 @@ export const webAddress = z
   .string()
   .trim()
   .max(2_000)
-  .refine((text) => /^(https?:\/\/|mailto:)[^\s]+$/i.test(text) && URL.canParse(text), complain('entry-not-link'));
+  .refine((text) => /^(https?:\/\/[^\s/?#@]+|mailto:[^\s@]+@[^\s@]+)[^\s]*$/i.test(text), complain('entry-not-link'));
 
 /** An instant in UTC as ISO 8601 text. */
 export const instant = z.iso.datetime();
 
 /** The version a row carries, raised by each change. */
 export const version = z.int().min(1);
+
+/** An e-mail address that may be left empty. */
+export const optionalEmailAddress = z.union([z.literal(''), emailAddress]);
+
+/** An address a page may link to, or nothing. */
+export const optionalWebAddress = z.union([z.literal(''), webAddress]);
+
+/** The version a change starts from; 0 where there was no row yet. */
+export const versionSeen = z.int().min(0);
+
+/** A day as YYYY-MM-DD. */
+export const day = z.iso.date();
+
+/** How many identical ones: 1 to 10,000. */
+export const count = z.int().min(1).max(10_000);
