@@ -23,6 +23,8 @@ export interface Surface {
   /** Girth across and run along, where the shape has them. */
   readonly girth_mm?: number;
   readonly run_mm?: number;
+  /** Chosen ends of a leg or cone: counted in the area, but not in girth × run. */
+  readonly ends_mm2?: number;
   readonly closedRun: boolean;
   /** Straight sides of the run, joined for laying and for planning carved repeats; one entry where the run is single. */
   readonly sides_mm: readonly number[];

@@ -1,0 +1,48 @@
+import { gaussLegendre } from '#shared/geometry/gauss-legendre';
+import { flutedSurface } from '#shared/measure/fluted-surface';
+import type { HelicoidShape, TwistedShape } from '#shared/measure/leg-shape';
+import { because, girthByRun, madeSurface } from '#shared/measure/made-surface';
+import { sectionOutline } from '#shared/measure/section-outline';
+import type { Surface } from '#shared/measure/surface';
+
+// ∫ √(ρ² + ρ′² + k²ρ²ρ′²) dφ round the section (own, from the first fundamental form), with k in radians per mm.
+function developedGirth({ section }: TwistedShape, twist: number): number {
+  const { radiusAt, slopeAt, piece_radians, pieces } = sectionOutline(section);
+  const element = (angle: number) => {
+    const [radius, slope] = [radiusAt(angle), slopeAt(angle)];
+    return Math.hypot(radius, slope, twist * radius * slope);
+  };
+  return pieces * gaussLegendre(element, [0, piece_radians], 128);
+}
+
+/** The surface of an evenly twisted member in mm and mm²: its length times the developed girth of its section. */
+export function twistedSurface(shape: TwistedShape): Surface {
+  const twist = shape.length_mm === 0 ? 0 : (2 * Math.PI * shape.turns) / shape.length_mm;
+  const girth_mm = developedGirth(shape, twist);
+  const straight_mm = developedGirth(shape, 0);
+  const factor = straight_mm === 0 ? 1 : girth_mm / straight_mm;
+  const twisted = girthByRun({
+    girth_mm,
+    run_mm: shape.length_mm,
+    laying: 'patches',
+    finish: 'moulded',
+    reasons: [because('measure-twist', factor, 'factor')],
+  });
+  return flutedSurface(twisted, shape.fluting);
+}
+
+// One turn between the axis and a radius R, rising c per radian: π·(R√(R² + c²) + c²·asinh(R/c)) (standard, from memory).
+const turnWithin = (radius: number, rise: number) =>
+  Math.PI * (radius * Math.hypot(radius, rise) + (rise === 0 ? 0 : rise * rise * Math.asinh(radius / rise)));
+
+/** One face of a helicoid between its core and its edge, in mm². */
+export function helicoidSurface({ radius_mm, coreRadius_mm, risePerTurn_mm, turns }: HelicoidShape): Surface {
+  const rise = risePerTurn_mm / (2 * Math.PI);
+  const turn_mm2 = turnWithin(radius_mm, rise) - turnWithin(coreRadius_mm, rise);
+  return madeSurface({
+    area_mm2: turns * turn_mm2,
+    laying: 'patches',
+    finish: 'moulded',
+    reasons: [because('measure-helicoid-turn', turn_mm2, 'mm2')],
+  });
+}

@@ -1,0 +1,8 @@
+import * as z from 'zod';
+import { shareEntry } from '#shared/measure/figure-schema';
+
+/** What a zone may take of its member: a share in per cent, or parts of the girth by their keys. */
+export const zoneTakeSchema = z.discriminatedUnion('way', [
+  z.strictObject({ way: z.literal('share'), share_percent: shareEntry }),
+  z.strictObject({ way: z.literal('parts'), parts: z.array(z.string().min(1).max(64)).max(64) }),
+]);
