@@ -29,7 +29,7 @@ export const zoneSchema = z.strictObject({
   chosenStepIds: few(cardItemId, 40),
   burnished_percent: percentEntry.nullable(),
   painted_percent: percentEntry,
-  recutting: z.enum(['none', ...recuttingManners]),
+  recutting: z.enum(recuttingManners).nullable(),
   protectedEdge_mm: z.number().min(0).max(1e6),
   alternativeId: identifier.nullable(),
 });

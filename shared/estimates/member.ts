@@ -22,7 +22,7 @@ export interface Zone {
   /** Null takes what the shape and the ornament suggest. */
   readonly finish: SurfaceFinish | null;
   readonly buildUpId: string;
-  /** Null takes the build-up's own leaf. */
+  /** Null where no leaf is chosen. */
   readonly leafId: string | null;
   readonly laying: ZoneLaying;
   /** Optional steps of the build-up done here, by their id. */
@@ -31,8 +31,8 @@ export interface Zone {
   readonly burnished_percent: number | null;
   /** Share of the zone that is ornament painted in glazes. */
   readonly painted_percent: number;
-  /** Recut in gesso: not at all, as usual, or in the French manner. */
-  readonly recutting: 'none' | RecuttingManner;
+  /** Recut in gesso as usual or in the French manner; null: not at all. */
+  readonly recutting: RecuttingManner | null;
   /** Edge protected before a second system is begun, per identical piece. */
   readonly protectedEdge_mm: number;
   readonly alternativeId: string | null;
