@@ -1,0 +1,41 @@
+import * as z from 'zod';
+
+const port = z.coerce.number().int().min(1).max(65_535);
+const secret = z.string().min(32, 'must be at least 32 characters');
+const database = z.string().regex(/^mariadb:\/\//, 'must begin with mariadb://');
+
+/** The environment variables the server reads; everything else in the environment is ignored. */
+export const configSchema = z
+  .object({
+    PORT: port.default(8080),
+    DATABASE_URL: database,
+    MIGRATION_DATABASE_URL: database.optional(),
+    DATA_DIR: z.string().min(1),
+    SESSION_SECRET: secret,
+    PUBLIC_URL: z.url({ protocol: /^https?$/ }).optional(),
+    SMTP_URL: z
+      .string()
+      .regex(/^smtps?:\/\//, 'must begin with smtp:// or smtps://')
+      .optional(),
+    MAIL_FROM: z.email().default('workshop@bolewright.invalid'),
+    LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('info'),
+    REQUESTS_PER_MINUTE: z.coerce.number().int().min(1).default(900),
+    DEMONSTRATION_PASSWORD: z.string().min(15).optional(),
+    WEB_DIR: z.string().min(1).default('dist/web'),
+    ALLOW_UNSAFE_DURABILITY: z.literal('yes').optional(),
+  })
+  .transform((env) => ({
+    port: env.PORT,
+    databaseUrl: env.DATABASE_URL,
+    migrationDatabaseUrl: env.MIGRATION_DATABASE_URL ?? env.DATABASE_URL,
+    dataFolder: env.DATA_DIR,
+    webFolder: env.WEB_DIR,
+    sessionSecret: env.SESSION_SECRET,
+    publicUrl: env.PUBLIC_URL ? new URL(env.PUBLIC_URL) : undefined,
+    smtpUrl: env.SMTP_URL,
+    mailFrom: env.MAIL_FROM,
+    logLevel: env.LOG_LEVEL,
+    requestsPerMinute: env.REQUESTS_PER_MINUTE,
+    demonstrationPassword: env.DEMONSTRATION_PASSWORD,
+    mayBeUnsafe: env.ALLOW_UNSAFE_DURABILITY === 'yes',
+  }));

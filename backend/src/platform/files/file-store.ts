@@ -1,0 +1,143 @@
+import { createHash, randomUUID } from 'node:crypto';
+import { mkdir, open, readdir, readFile, rename, rm, stat } from 'node:fs/promises';
+import { dirname, join } from 'node:path';
+import { v7 as newId } from 'uuid';
+import { Rejection } from '#shared/problems/rejection';
+import type { Clock } from '../clock/clock';
+import { column } from '../database/columns';
+import type { Database } from '../database/database';
+import { WorkshopRows, type WorkshopRow } from '../database/workshop-rows';
+
+/** A row that names a file; the bytes lie in the data folder under their SHA-256. */
+export interface FileRow extends WorkshopRow {
+  readonly sha256: string;
+  readonly name: string;
+  readonly media: string;
+  readonly size_bytes: number;
+  readonly createdAt: Date;
+}
+
+export interface NewFile {
+  readonly name: string;
+  readonly media: string;
+  readonly bytes: Buffer;
+}
+
+export interface StoredFile extends FileRow {
+  readonly bytes: Buffer;
+}
+
+const orphanAge_milliseconds = 3_600_000;
+
+async function writeThrough(path: string, bytes: Buffer): Promise<void> {
+  const file = await open(path, 'wx', 0o600);
+  try {
+    await file.writeFile(bytes);
+    await file.sync();
+  } finally {
+    await file.close();
+  }
+}
+
+async function syncFolder(path: string): Promise<void> {
+  const folder = await open(path, 'r');
+  await folder.sync().finally(() => folder.close());
+}
+
+const isThere = (path: string): Promise<boolean> =>
+  stat(path).then(
+    () => true,
+    () => false,
+  );
+const names = (folder: string): Promise<string[]> => readdir(folder).catch(() => []);
+
+/**
+ * Files of the workshops, each under its content's SHA-256 in a folder of its workshop. The bytes are on the disk before the row
+ * that names them is committed; they are read only through such a row; bytes no row names are swept away after an hour.
+ */
+export class FileStore {
+  private readonly rows: WorkshopRows<FileRow>;
+
+  constructor(
+    private readonly database: Database,
+    private readonly folder: string,
+    private readonly clock: Clock,
+  ) {
+    this.rows = new WorkshopRows(
+      database.table<FileRow>('files', {
+        id: column.id,
+        workshopId: column.workshopId,
+        sha256: column.word,
+        name: column.word,
+        media: column.word,
+        size_bytes: column.whole,
+        createdAt: column.instant,
+      }),
+    );
+  }
+
+  async save(workshopId: string, file: NewFile): Promise<FileRow> {
+    const sha256 = createHash('sha256').update(file.bytes).digest('hex');
+    await this.keep(this.pathOf(workshopId, sha256), file.bytes);
+    return this.rows.insert(workshopId, {
+      id: newId(),
+      sha256,
+      name: file.name,
+      media: file.media,
+      size_bytes: file.bytes.length,
+      createdAt: this.clock.now(),
+    });
+  }
+
+  find(workshopId: string, id: string): Promise<FileRow | undefined> {
+    return this.rows.find(workshopId, id);
+  }
+
+  /** The file with its bytes; refused as not found when this workshop has no such row. */
+  async read(workshopId: string, id: string): Promise<StoredFile> {
+    const row = await this.rows.get(workshopId, id);
+    const bytes = await readFile(this.pathOf(workshopId, row.sha256));
+    if (createHash('sha256').update(bytes).digest('hex') !== row.sha256) throw new Error(`file ${id} is damaged`);
+    return { ...row, bytes };
+  }
+
+  async remove(workshopId: string, id: string): Promise<void> {
+    if (!(await this.rows.remove(workshopId, id))) throw new Rejection('not-found', 'problem-not-found');
+  }
+
+  /** Deletes bytes older than an hour that no row names; answers how many files went. */
+  async sweep(): Promise<number> {
+    let swept = 0;
+    for (const workshopId of await names(this.folder)) {
+      for (const shelf of await names(join(this.folder, workshopId))) {
+        for (const name of await names(join(this.folder, workshopId, shelf))) {
+          swept += (await this.sweepOne(workshopId, name)) ? 1 : 0;
+        }
+      }
+    }
+    return swept;
+  }
+
+  private pathOf(workshopId: string, sha256: string): string {
+    return join(this.folder, workshopId, sha256.slice(0, 2), sha256);
+  }
+
+  private async keep(path: string, bytes: Buffer): Promise<void> {
+    if (await isThere(path)) return;
+    const folder = dirname(path);
+    await mkdir(folder, { recursive: true, mode: 0o700 });
+    const making = join(folder, `${randomUUID()}.making`);
+    await writeThrough(making, bytes);
+    await rename(making, path);
+    await syncFolder(folder);
+  }
+
+  private async sweepOne(workshopId: string, name: string): Promise<boolean> {
+    const path = join(this.folder, workshopId, name.slice(0, 2), name);
+    const found = await stat(path).catch(() => undefined);
+    if (!found || this.clock.now().getTime() - found.mtimeMs < orphanAge_milliseconds) return false;
+    if ((await this.rows.list(workshopId, { where: { sha256: name }, limit: 1 })).length > 0) return false;
+    await rm(path, { force: true });
+    return true;
+  }
+}

@@ -1,0 +1,48 @@
+import type { Request } from 'express';
+import type { Endpoint } from '#shared/actor/endpoint';
+import type { Complaint } from '#shared/problems/complaint';
+import { complaintsOf } from '#shared/problems/complaints-of';
+import { Rejection } from '#shared/problems/rejection';
+import * as z from 'zod';
+
+const nothing = z.strictObject({});
+type Part = 'params' | 'query' | 'body';
+
+export interface Parsed {
+  readonly params: unknown;
+  readonly query: unknown;
+  readonly body: unknown;
+}
+
+/** A body is an object; an endpoint without one accepts none. */
+const schemaOf = (endpoint: Endpoint, part: Part): z.ZodType => {
+  const schema = endpoint[part];
+  return schema instanceof z.ZodObject ? schema.strict() : (schema ?? nothing);
+};
+
+const sent = (request: Request, part: Part): unknown => request[part] ?? {};
+
+/** Parses the whole request and refuses it with all complaints at once; those of the body stand at their field's own path. */
+export function parseRequest(endpoint: Endpoint, request: Request): Parsed {
+  const complaints: Complaint[] = [];
+  const parse = (part: Part): unknown => {
+    const read = schemaOf(endpoint, part).safeParse(sent(request, part));
+    if (read.success) return read.data;
+    const at = part === 'body' ? [] : [part];
+    complaints.push(
+      ...complaintsOf(read.error).map((complaint) => ({ ...complaint, path: [...at, ...complaint.path] })),
+    );
+    return undefined;
+  };
+  const parsed = { params: parse('params'), query: parse('query'), body: parse('body') };
+  if (complaints.length > 0) throw new Rejection('invalid', 'problem-invalid', { complaints });
+  return parsed;
+}
+
+/** The version of an If-Match header as our ETags write it; refuses a versioned request without one. */
+export function versionSeen(endpoint: Endpoint, request: Request): number {
+  if (!endpoint.versioned) return 0;
+  const version = /^"(\d{1,9})"$/.exec(request.get('if-match') ?? '')?.[1];
+  if (version === undefined) throw new Rejection('invalid', 'problem-no-version');
+  return Number(version);
+}

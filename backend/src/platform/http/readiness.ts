@@ -1,0 +1,33 @@
+import type { RequestHandler } from 'express';
+import type { Database } from '../database/database';
+
+/** Whether the server takes requests: it stops saying so a moment before it stops. */
+export class Readiness {
+  private stopping = false;
+
+  constructor(private readonly database: Database) {}
+
+  stop(): void {
+    this.stopping = true;
+  }
+
+  /** 200 while the process lives. */
+  readonly alive: RequestHandler = (_request, response) => void response.json({ alive: true });
+
+  /** 200 while requests are welcome and the database answers, else 503. */
+  readonly ready: RequestHandler = async (_request, response) => {
+    const answers =
+      !this.stopping &&
+      (await this.database.select('SELECT 1 AS one').then(
+        () => true,
+        () => false,
+      ));
+    response.status(answers ? 200 : 503).json({ ready: answers });
+  };
+
+  /** Asks clients to let go of their connection once the server is about to stop. */
+  readonly letGo: RequestHandler = (_request, response, next) => {
+    if (this.stopping) response.set('Connection', 'close');
+    next();
+  };
+}

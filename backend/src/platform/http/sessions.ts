@@ -1,0 +1,106 @@
+import { randomBytes, randomUUID } from 'node:crypto';
+import type { Request, RequestHandler } from 'express';
+import session from 'express-session';
+import { Passport } from 'passport';
+import { Strategy as LocalStrategy } from 'passport-local';
+import type { Config } from '../config/config';
+import { markUnattended, type SessionStore } from '../session/session-store';
+import type { Identities, Identity, SessionControl, SignedIn } from '../session/session-control';
+
+/** Requests that a page sends on its own, such as polling, carry this header and do not prolong a session. */
+export const unattendedHeader = 'x-unattended';
+
+export const isPublic = (config: Config): boolean => config.publicUrl?.protocol === 'https:';
+export const cookieName = (config: Config): string => (isPublic(config) ? '__Host-bolewright' : 'bolewright');
+
+export const signedInOf = (request: Request): SignedIn | undefined => request.user as SignedIn | undefined;
+
+const beginSession = (request: Request): void => {
+  request.session.forgeryToken ??= randomBytes(32).toString('base64url');
+  request.session.handle ??= randomUUID();
+  request.session.agent ??= (request.get('user-agent') ?? '').slice(0, 200);
+};
+
+/** Reads the session of a request and who it speaks for. */
+export class Sessions {
+  private readonly passport = new Passport();
+
+  constructor(
+    private readonly config: Config,
+    private readonly store: SessionStore,
+    identities: Identities,
+  ) {
+    this.passport.serializeUser(
+      (request: Request, user: Express.User, done: (error: unknown, user: Express.User) => void) => {
+        beginSession(request);
+        done(null, user);
+      },
+    );
+    this.passport.deserializeUser((identity: Identity, done) => {
+      identities.load(identity).then((signedIn) => done(null, (signedIn as Express.User | undefined) ?? false), done);
+    });
+    this.passport.use(
+      new LocalStrategy({ usernameField: 'email', passReqToCallback: true }, (request, email, password, done) => {
+        identities
+          .verify({ email, password, address: request.ip ?? '' })
+          .then((identity) => done(null, identity ?? false), done);
+      }),
+    );
+  }
+
+  middleware(): RequestHandler[] {
+    const cookie = { httpOnly: true, sameSite: 'lax', secure: isPublic(this.config), path: '/' } as const;
+    const unattended: RequestHandler = (request, _response, next) => {
+      if (request.get(unattendedHeader)) markUnattended(request.session);
+      next();
+    };
+    return [
+      session({
+        name: cookieName(this.config),
+        secret: this.config.sessionSecret,
+        store: this.store,
+        cookie,
+        resave: false,
+        saveUninitialized: false,
+        genid: () => randomBytes(32).toString('base64url'),
+      }),
+      unattended,
+      this.passport.session() as RequestHandler,
+    ];
+  }
+
+  control(request: Request): SessionControl {
+    const signIn = (identity: Identity) => this.signIn(request, identity);
+    return {
+      id: request.session.passport?.user ? request.session.handle : undefined,
+      get forgeryToken() {
+        beginSession(request);
+        return request.session.forgeryToken ?? '';
+      },
+      signIn,
+      signInByPassword: () => this.byPassword(request, signIn),
+      signOut: () =>
+        new Promise((resolve, reject) =>
+          request.session.destroy((error) => (error ? reject(error as Error) : resolve())),
+        ),
+    };
+  }
+
+  private signIn(request: Request, identity: Identity): Promise<void> {
+    return new Promise((resolve, reject) => {
+      request.logIn(identity as Express.User, (error) => (error ? reject(error as Error) : resolve()));
+    });
+  }
+
+  private byPassword(request: Request, signIn: (identity: Identity) => Promise<void>): Promise<Identity | undefined> {
+    return new Promise((resolve, reject) => {
+      const decide = (error: unknown, identity: Identity | false): void => {
+        if (error) return reject(error as Error);
+        if (!identity) return resolve(undefined);
+        signIn(identity).then(() => resolve(identity), reject);
+      };
+      const strategy = this.passport.authenticate('local', decide) as RequestHandler;
+      void strategy(request, request.res!, reject);
+    });
+  }
+}

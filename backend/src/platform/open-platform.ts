@@ -1,0 +1,17 @@
+import { join } from 'node:path';
+import type { Clock } from './clock/clock';
+import type { Config } from './config/config';
+import { Database } from './database/database';
+import { FileStore } from './files/file-store';
+import type { Log } from './log/log';
+import { Mailbox } from './mail/mailbox';
+import type { Platform } from './platform';
+import { Tasks } from './tasks/tasks';
+
+/** Puts together what the features stand on; nothing is started yet. */
+export function openPlatform(config: Config, clock: Clock, log: Log): Platform {
+  const database = new Database(config.databaseUrl);
+  const tasks = new Tasks(database, clock, log);
+  const files = new FileStore(database, join(config.dataFolder, 'files'), clock);
+  return { config, clock, log, database, tasks, files, mailbox: new Mailbox(config, tasks) };
+}

@@ -1,0 +1,40 @@
+import type { Actor } from '#shared/actor/actor';
+
+/** What a session remembers of a person: who, and as whom of which workshop. */
+export interface Identity {
+  readonly accountId: string;
+  readonly membershipId?: string;
+}
+
+/** A person signed in, in a workshop or in none. */
+export interface Person {
+  readonly accountId: string;
+  readonly email: string;
+  readonly name: string;
+}
+
+export interface SignedIn {
+  readonly person: Person;
+  readonly actor: Actor | undefined;
+}
+
+/** The port through which sessions learn who somebody is; `accounts` supplies it. */
+export interface Identities {
+  /** Who a session speaks for now, or nobody if the account or the membership was ended since. */
+  load(identity: Identity): Promise<SignedIn | undefined>;
+  /** The identity behind an e-mail address and its password, or nobody; refuses as too many. */
+  verify(entry: { email: string; password: string; address: string }): Promise<Identity | undefined>;
+}
+
+/** What a handler may do with the session of its request. */
+export interface SessionControl {
+  /** The public handle of this session, undefined until somebody signed in. */
+  readonly id: string | undefined;
+  /** The token that unsafe requests of this session carry. */
+  readonly forgeryToken: string;
+  /** Checks the e-mail and password in the body and signs in under a new session id; answers nobody when they do not fit. */
+  signInByPassword(): Promise<Identity | undefined>;
+  /** Signs in under a new session id. */
+  signIn(identity: Identity): Promise<void>;
+  signOut(): Promise<void>;
+}

@@ -1,0 +1,16 @@
+import 'express-session';
+
+declare module 'express-session' {
+  interface SessionData {
+    /** The token unsafe requests must carry. */
+    forgeryToken: string;
+    /** The public handle of the session, by which its owner may end it. */
+    handle: string;
+    agent: string;
+    passport: { user?: { accountId: string; membershipId?: string } };
+    /** When the session was last marked as used, as the store read it. */
+    seenAt: number;
+    /** Set for a request that nobody's hand made (polling): it does not prolong the session. */
+    unattended: boolean;
+  }
+}

@@ -1,0 +1,154 @@
+import { randomInt } from 'node:crypto';
+import { v7 as newId } from 'uuid';
+import type { Clock } from '../clock/clock';
+import type { Database } from '../database/database';
+import { isInTransaction, outsideTransaction } from '../database/transaction-context';
+import type { Log } from '../log/log';
+
+/** One piece of work to do behind the scenes. `content` must be plain JSON; ids, never whole rows. */
+export interface Task<Content = unknown> {
+  readonly id: string;
+  readonly workshopId: string | null;
+  readonly kind: string;
+  readonly content: Content;
+  readonly attempts: number;
+}
+
+export interface NewTask {
+  readonly workshopId: string | null;
+  readonly kind: string;
+  readonly content: object;
+  readonly runAfter?: Date;
+}
+
+export type TaskHandler<Content> = (content: Content, task: Task<Content>) => Promise<void>;
+
+const mostAttempts = 12;
+const pause_milliseconds = 1_000;
+
+/** 10 s, 20 s, 40 s … up to six hours between attempts, a tenth more or less by chance so that failures do not march in step. */
+const backOff_milliseconds = (attempts: number): number =>
+  Math.min(100 * 2 ** (attempts - 1), 6 * 36_000) * randomInt(90, 110);
+
+/**
+ * Work that outlives its request. `add` writes it in the running transaction, so it happens exactly if the business step does; a
+ * worker takes one row at a time (SKIP LOCKED, so several servers may), runs it in a transaction of its own, and strikes it off there.
+ */
+export class Tasks {
+  private readonly handlers = new Map<string, TaskHandler<never>>();
+  private timer: NodeJS.Timeout | undefined;
+  private round: Promise<void> = Promise.resolve();
+
+  constructor(
+    private readonly database: Database,
+    private readonly clock: Clock,
+    private readonly log: Log,
+  ) {}
+
+  /** Says who does the work of a kind; a handler may run twice, so it must not mind. */
+  register<Content>(kind: string, handler: TaskHandler<Content>): void {
+    this.handlers.set(kind, handler as TaskHandler<never>);
+  }
+
+  async add(task: NewTask): Promise<string> {
+    if (!isInTransaction()) throw new Error('a task is written in the transaction of the step that wants it');
+    const id = newId();
+    const now = this.clock.now();
+    await this.database.execute(
+      `INSERT INTO tasks (id, workshop_id, kind, content, attempts, run_after, created_at)
+       VALUES (:id, :workshopId, :kind, :content, 0, :runAfter, :now)`,
+      {
+        id,
+        workshopId: task.workshopId,
+        kind: task.kind,
+        content: JSON.stringify(task.content),
+        runAfter: task.runAfter ?? now,
+        now,
+      },
+    );
+    return id;
+  }
+
+  start(): void {
+    this.timer = setInterval(() => {
+      this.round = this.round.then(() => this.runDue());
+    }, pause_milliseconds);
+    this.timer.unref();
+  }
+
+  /** Ends the worker once the task in hand is done. */
+  async stop(): Promise<void> {
+    clearInterval(this.timer);
+    await this.round;
+  }
+
+  /** Runs whatever is due, one after the other, until nothing is left; answers how many ran. */
+  async runDue(): Promise<void> {
+    try {
+      while (await outsideTransaction(() => this.runOne()));
+    } catch (error) {
+      this.log.error({ error }, 'the tasks could not be read');
+    }
+  }
+
+  /** Tasks that failed for the last time, for the eyes of whoever runs the server. */
+  failed(): Promise<{ id: string; kind: string; lastError: string }[]> {
+    return this.database.select(
+      'SELECT id, kind, last_error AS lastError FROM tasks WHERE failed_at IS NOT NULL ORDER BY id LIMIT 1000',
+    );
+  }
+
+  private async runOne(): Promise<boolean> {
+    const failure: { task?: Task; error?: unknown } = {};
+    const ran = await this.database
+      .transaction(async () => {
+        const task = await this.take();
+        if (!task) return false;
+        failure.task = task;
+        await this.perform(task);
+        await this.database.execute('DELETE FROM tasks WHERE id = :id', { id: task.id });
+        return true;
+      })
+      .catch((error: unknown) => {
+        if (!failure.task) throw error;
+        failure.error = error;
+        return true;
+      });
+    if (failure.task && 'error' in failure) await this.postpone(failure.task, failure.error);
+    return ran;
+  }
+
+  private async take(): Promise<Task | undefined> {
+    const [task] = await this.database.select<Task>(
+      `SELECT id, workshop_id AS workshopId, kind, content, attempts FROM tasks
+       WHERE failed_at IS NULL AND run_after <= :now AND kind IN (:kinds) ORDER BY run_after, id LIMIT 1 FOR UPDATE SKIP LOCKED`,
+      { now: this.clock.now(), kinds: [...this.handlers.keys(), ''] },
+    );
+    return task;
+  }
+
+  private async perform(task: Task): Promise<void> {
+    const handler = this.handlers.get(task.kind) as TaskHandler<unknown> | undefined;
+    await handler?.(task.content, task);
+  }
+
+  private async postpone(task: Task, error: unknown): Promise<void> {
+    const attempts = task.attempts + 1;
+    const over = attempts >= mostAttempts;
+    const now = this.clock.now();
+    this.log.warn(
+      { task: task.id, kind: task.kind, workshopId: task.workshopId, attempts, over, error },
+      'a task failed',
+    );
+    await this.database.execute(
+      'UPDATE tasks SET attempts = :attempts, run_after = :runAfter, failed_at = :failedAt, last_error = :lastError WHERE id = :id',
+      {
+        id: task.id,
+        attempts,
+        runAfter: new Date(now.getTime() + backOff_milliseconds(attempts)),
+        failedAt: over ? now : null,
+        lastError: String((error as Error).message ?? error).slice(0, 500),
+      },
+    );
+  }
+}
