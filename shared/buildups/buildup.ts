@@ -60,7 +60,7 @@ export const holdPoints = ['carving-approved', 'sample-approved', 'top-dry-fitte
 export type HoldPoint = (typeof holdPoints)[number];
 
 /** What the trade does when a window was missed. */
-export const missedWindows = ['revive-or-relay', 'new-size', 'key-and-recoat', 'strip-ground'] as const;
+export const missedWindows = ['revive-or-relay', 'new-size', 'key-and-recoat', 'strip-ground', 'tarnished'] as const;
 export type MissedWindow = (typeof missedWindows)[number];
 
 /** Coats by the surface they go on: finished work plain, moulded or carved, carving that is recut afterwards, and recut in the French manner. */

@@ -9,14 +9,17 @@ interface SizedLayer {
   readonly strength: number;
 }
 
+/** Consolidating feeds an old ground and is no layer of the new one. */
 function sizedLayers(buildUp: BuildUp, card: BuildUpCard): SizedLayer[] {
-  return buildUp.steps.flatMap((step) =>
-    step.uses.flatMap((use) => {
-      const recipe = use.of === 'recipe' ? card.recipes.find((known) => known.id === use.itemId) : undefined;
-      const strength = recipe ? sizeStrength(recipe) : null;
-      return recipe && strength !== null ? [{ step, recipe, strength }] : [];
-    }),
-  );
+  return buildUp.steps
+    .filter((step) => step.kind !== 'consolidate')
+    .flatMap((step) =>
+      step.uses.flatMap((use) => {
+        const recipe = use.of === 'recipe' ? card.recipes.find((known) => known.id === use.itemId) : undefined;
+        const strength = recipe ? sizeStrength(recipe) : null;
+        return recipe && strength !== null ? [{ step, recipe, strength }] : [];
+      }),
+    );
 }
 
 /** Refuses a build-up in which a layer is bound with stronger size than the sized layer before it (Rivers & Umney: strength falls outwards). */

@@ -89,7 +89,7 @@ function byLaying(on: StepOnZone, part: 'first' | 'faulting' | 'second', card: B
   const minutes = minutesPerLaid(on.facts, on.system, card.laying);
   const laid = on.facts.laying?.counts[part] ?? 0;
   const likely = (minutes * laid) / 60;
-  const values = { step: on.step.name, laid, rate_minutes: minutes, way: on.facts.laying?.way ?? 'none' };
+  const values = { step: on.step.name, laid, rate: minutes, way: on.facts.laying?.way ?? 'none' };
   const reason: Reason = {
     code: 'buildup-hours-by-laying',
     values,

@@ -6,7 +6,7 @@ export const buildups = {
   'buildup-hours-painted':
     '{step} on painted ornament: {area_mm2} × {coats, plural, one {# coat} other {# coats}} × {rate_hours} a square decimetre.',
   'buildup-hours-by-laying':
-    '{step}: {laid, number} {way, select, lays {pieces} other {leaves}} handled, broken ones included, at {rate_minutes} each.',
+    '{step}: {laid, number} {way, select, lays {pieces} other {leaves}} handled, broken ones included, at {rate, number} minutes each.',
   'buildup-hours-by-edge': '{step}: {edge_mm} of edge at {rate_hours} a metre.',
   'buildup-hours-restoring': '{step}: {area_mm2} at {rate_hours} a square metre.',
   'buildup-hours-recutting': '{step}: as worked out with the carving, and counted there.',
@@ -54,4 +54,9 @@ export const buildups = {
     '{steps}: animal glue can cause allergy of skin and breath. Gloves, and no breathing in of the powder.',
   'caution-glue-heat': '{steps}: never let glue pass 55 °C. It loses its strength.',
   'caution-defer': 'Follow local codes and the product’s safety data sheet; ask a licensed professional.',
+  'buildup-window-closed': 'The next coat cannot be due before it may be put on.',
+  'buildup-lag-leads-nowhere': 'This has to name a later step of the same build-up.',
+  'buildup-no-mercury': 'Mercury (fire) gilding is never offered here: its vapour poisons.',
+  'buildup-part-material': 'Water has no material; every other part of a recipe has one.',
+  'card-reference-unknown': 'The rate card holds no item {id}.',
 } as const;
