@@ -35,7 +35,7 @@ function learningOf(uses: readonly Catalogued[], card: CarvingCard): Map<Catalog
     })),
     card.learning,
   );
-  return new Map(learnt.map((use, index) => [use, shares[index] as LearntPieces]));
+  return new Map(learnt.map((use, index) => [use, shares[index]]));
 }
 
 /** Hours of every use the card knows, in their order, learning counted over all of them together. */

@@ -36,6 +36,7 @@ export interface LaysLaying {
   readonly way: 'lays';
   readonly girth_mm: number;
   readonly run_mm: number;
+  readonly lap_mm: number;
   readonly step_mm: number;
   readonly chosen: LaysOption;
   /** Every allowed way to cut the leaf, by number of strips. */
@@ -89,18 +90,8 @@ export function laysLaying(run: MouldingRun, step: LeafStep, choice: LaysChoice)
   });
   const chosen = cheapest(options, choice);
   const small = choice.strips === null ? smallPieces(run, step) : null;
-  const counted = small ? { leaves: 1 / (small.across * small.along), pieces: 1 } : chosen;
+  const { leaves, pieces } = small ? { leaves: 1 / (small.across * small.along), pieces: 1 } : chosen;
   const { girth_mm, run_mm } = run;
-  const step_mm = step.side_mm - step.lap_mm;
-  return {
-    way: 'lays',
-    girth_mm,
-    run_mm,
-    step_mm,
-    chosen,
-    options,
-    small,
-    leaves: counted.leaves,
-    pieces: counted.pieces,
-  };
+  const { side_mm, lap_mm } = step;
+  return { way: 'lays', girth_mm, run_mm, lap_mm, step_mm: side_mm - lap_mm, chosen, options, small, leaves, pieces };
 }

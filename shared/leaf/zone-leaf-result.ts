@@ -4,6 +4,7 @@ import type { LayingWay } from '#shared/leaf/leaf-card';
 import type { PatchesLaying } from '#shared/leaf/patches-laying';
 import type { RibbonLaying } from '#shared/leaf/ribbon-laying';
 import type { SheetsLaying } from '#shared/leaf/sheets-laying';
+import type { ZoneLosses } from '#shared/leaf/zone-losses';
 import type { Triple } from '#shared/units/triple';
 import type { Finding } from '#shared/words/finding';
 import type { Reason } from '#shared/words/reason';
@@ -11,21 +12,16 @@ import type { Reason } from '#shared/words/reason';
 /** How the leaf was counted on one member, before relief and share. */
 export type Laying = SheetsLaying | LaysLaying | PatchesLaying | RibbonLaying;
 
-/** The three losses of a way of laying and a finish, in percent. */
-export interface ZoneLosses {
-  readonly breakage_percent: Triple;
-  readonly faulting_percent: Triple;
-  readonly second_percent: Triple;
-}
-
-/** Leaf of one zone over all identical members; leaves are not rounded. */
+/** Leaf of one zone over all identical members; leaves are not rounded, of ribbon a leaf is a roll. */
 export interface ZoneLeaf {
   readonly zoneId: string;
   readonly productId: string;
   readonly ground: LaidGround;
+  /** The way whose losses count; ribbon is laid as sheets are. */
   readonly way: LayingWay;
-  readonly laying: Laying;
-  /** After openings and share, over all members; true area with relief. */
+  /** Null where nothing could be counted; a finding says why. */
+  readonly laying: Laying | null;
+  /** After openings and share, over all members; the true area has the relief in it. */
   readonly planArea_mm2: number;
   readonly trueArea_mm2: number;
   readonly netLeaves: number;
@@ -34,8 +30,8 @@ export interface ZoneLeaf {
   /** With every loss at its own tenth and ninetieth percentile. */
   readonly grossLeaves_p10: number;
   readonly grossLeaves_p90: number;
-  /** Pieces handled in laying the gross leaves: leaves, strips or cuts. */
-  readonly grossPieces: Triple;
+  /** What laying minutes go by: gross leaves (sheets, patches), gross strips (lays), gross metres (ribbon). */
+  readonly handled: Triple;
   readonly reasons: readonly Reason[];
   readonly findings: readonly Finding[];
 }

@@ -1,0 +1,63 @@
+import { layingReasons } from '#shared/leaf/laying-reasons';
+import type { ZoneLeafInput } from '#shared/leaf/zone-leaf-input';
+import type { ZoneLeaf } from '#shared/leaf/zone-leaf-result';
+import type { Reason } from '#shared/words/reason';
+
+type Worked = Omit<ZoneLeaf, 'reasons' | 'findings'>;
+
+// A step that changes nothing is not told.
+const unlessOne = (reason: Reason): Reason[] => (reason.figure === 1 ? [] : [reason]);
+
+const ofShare = (share: number): Reason => ({ code: 'leaf-share', values: {}, figure: share * 100, unit: 'percent' });
+
+function splitReasons({ openings_mm2, surface, share, members, relief, reliefFactor }: ZoneLeafInput): Reason[] {
+  const open = surface.area_mm2 > 0 ? Math.max(0, 1 - openings_mm2 / surface.area_mm2) : 1;
+  const house = 'measure.reliefFactors';
+  return [
+    ...unlessOne({ code: 'leaf-openings', values: { openings_mm2 }, figure: open, unit: 'factor' }),
+    ...(share === 1 ? [] : [ofShare(share)]),
+    ...unlessOne({ code: 'leaf-members', values: {}, figure: members, unit: 'factor' }),
+    ...unlessOne({ code: 'leaf-relief', values: { relief }, figure: reliefFactor, unit: 'factor', house }),
+  ];
+}
+
+function lossReasons({ way, ground, losses }: Worked): Reason[] {
+  const of = `leaf.losses.${way}`;
+  return [
+    {
+      code: 'leaf-second-laying',
+      values: {},
+      figure: losses.second_percent.likely,
+      unit: 'percent',
+      house: `leaf.secondLaying_percent.${ground.finish}.${way}`,
+    },
+    {
+      code: 'leaf-faulting',
+      values: {},
+      figure: losses.faulting_percent.likely,
+      unit: 'percent',
+      house: `${of}.faulting_percent`,
+    },
+    {
+      code: 'leaf-breakage',
+      values: {},
+      figure: 1 - losses.breakage_percent.likely / 100,
+      unit: 'divisor',
+      house: `${of}.breakage_percent`,
+    },
+  ];
+}
+
+/** Why a zone takes so many leaves: laying, share, relief, net, each loss, and the leaves with their P10–P90 range. */
+export function zoneLeafReasons(input: ZoneLeafInput, worked: Worked): Reason[] {
+  if (!worked.laying) return [];
+  const range = { low: worked.grossLeaves_p10, high: worked.grossLeaves_p90 };
+  const code = worked.laying.way === 'ribbon' ? 'leaf-rolls' : 'leaf-leaves';
+  return [
+    ...layingReasons(worked.laying),
+    ...splitReasons(input),
+    { code: 'leaf-net', values: { area_mm2: worked.trueArea_mm2 }, figure: worked.netLeaves, unit: 'number' },
+    ...lossReasons(worked),
+    { code, values: range, figure: worked.grossLeaves.likely, unit: 'number' },
+  ];
+}
