@@ -11,6 +11,7 @@ const anyOf = (names) => `(${names.join('|')})`;
 const onAnySide = (names) => `^(shared|backend/src|frontend/src/app)/${anyOf(names)}/`;
 const installed = (names) => `(^|/)node_modules/(@types/)?${anyOf(names)}/`;
 
+const typesOnly = '(^|/)node_modules/@types/';
 const spec = '\\.spec\\.ts$';
 const testSupport = '^(test|frontend/src/test)/';
 const schemaOrEndpoints = '^shared/(endpoints|.+(-schema|-endpoints|/endpoint))\\.ts$';
@@ -21,15 +22,13 @@ const pageEntry = '^frontend/src/(app/)?[^/]+\\.ts$';
 
 const never = (name, rule) => ({ name, severity: 'error', ...rule });
 
-const order = features
-  .slice(0, -1)
-  .map((feature, index) =>
-    never(`${feature} imports only what stands before it in the list of features`, {
-      comment: 'A reader who follows the list never meets a folder that needs one they have not seen.',
-      from: { path: onAnySide([feature]) },
-      to: { path: onAnySide(features.slice(index + 1)) },
-    }),
-  );
+const order = features.slice(0, -1).map((feature, index) =>
+  never(`${feature} imports only what stands before it in the list of features`, {
+    comment: 'A reader who follows the list never meets a folder that needs one they have not seen.',
+    from: { path: onAnySide([feature]) },
+    to: { path: onAnySide(features.slice(index + 1)) },
+  }),
+);
 
 const sides = [
   never('The shared side imports neither the server nor the page', {
@@ -203,12 +202,12 @@ const everywhere = [
   never('Every package is named in package.json', {
     comment: 'A package that came along with another may leave with it.',
     from: {},
-    to: { dependencyTypes: ['npm-no-pkg', 'npm-unknown'] },
+    to: { dependencyTypes: ['npm-no-pkg', 'npm-unknown'], pathNot: typesOnly },
   }),
   never('Nothing that runs needs a development package', {
     comment: 'The product is served without them.',
     from: { path: '^(shared|backend/src|frontend/src|seeders)/', pathNot: [spec, testSupport] },
-    to: { dependencyTypes: ['npm-dev'], pathNot: '(^|/)node_modules/@types/' },
+    to: { dependencyTypes: ['npm-dev'], pathNot: typesOnly },
   }),
 ];
 

@@ -14,6 +14,10 @@ ruleTester.run('no-string-built-sql', noStringBuiltSql, {
       name: 'parts written in the same file',
       code: "const columns = 'id, name'; database.query(`SELECT ${columns} FROM jobs`);",
     },
+    {
+      name: 'parts written in an imported file',
+      code: "import { id, types } from './types-of-columns'; database.query(`CREATE TABLE jobs (id ${id}, day ${types.day})`);",
+    },
     { name: 'one of two written orders', code: "database.query(descending ? 'SELECT 1' : 'SELECT 2');" },
     { name: 'a written text over two lines', code: "database.query('SELECT id ' + 'FROM jobs');" },
     { name: 'a statement handed on', code: 'const run = (sql: string) => database.query(sql);' },
@@ -37,6 +41,16 @@ ruleTester.run('no-string-built-sql', noStringBuiltSql, {
     {
       name: 'a text built before, without a verb in front',
       code: 'const sql = `${verb} FROM jobs`; database.query(sql);',
+      errors,
+    },
+    {
+      name: 'the answer of an imported function',
+      code: "import { condition } from './condition'; database.query(`SELECT id FROM jobs WHERE ${condition(name)}`);",
+      errors,
+    },
+    {
+      name: 'a property of an imported table chosen by the run',
+      code: "import { columns } from './columns'; database.query(`SELECT ${columns[key]} FROM jobs`);",
       errors,
     },
     { name: 'pieces joined', code: "database.query(['SELECT id FROM jobs', condition].join(' '));", errors },

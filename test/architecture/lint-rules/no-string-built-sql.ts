@@ -1,5 +1,5 @@
 import type { Rule, Scope } from 'eslint';
-import { declaredAs } from './declared-as';
+import { declaredAs, isImported } from './declared-as';
 
 type Node = Rule.Node;
 type Call = Extract<Node, { type: 'CallExpression' }>;
@@ -13,10 +13,10 @@ const joiners = new Set(['concat', 'join', 'replace', 'replaceAll', 'padEnd', 'p
 const beginsLikeSql =
   /^\s*(SELECT|INSERT|REPLACE|UPDATE|DELETE|CREATE|ALTER|DROP|TRUNCATE|GRANT|CALL|SHOW|LOCK|WITH|SET)\s/;
 
-/** Whether a text stands written in the file, whatever happens at run time. */
+/** Whether a text stands written in this file or an imported one, whatever happens at run time. */
 function isWritten(node: Node, scope: Scope.Scope): boolean {
   const text = declaredAs(node, scope);
-  if (text.type === 'Literal') return true;
+  if (text.type === 'Literal' || isImported(text, scope)) return true;
   if (text.type === 'TemplateLiteral') return (text.expressions as Node[]).every((part) => isWritten(part, scope));
   if (text.type === 'BinaryExpression')
     return isWritten(text.left as Node, scope) && isWritten(text.right as Node, scope);
