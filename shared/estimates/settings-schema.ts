@@ -94,7 +94,15 @@ export const settingsSchema = z.strictObject({
   taxCategoryId: cardItemId,
   extras: z.array(extraLineSchema).max(100),
   alternatives: z
-    .array(z.strictObject({ id: identifier, name: line(120), group: optionalLine(80), note: paragraphs(1000) }))
+    .array(
+      z.strictObject({
+        id: identifier,
+        name: line(120),
+        group: optionalLine(80),
+        note: paragraphs(1000),
+        replaces: z.array(identifier).max(400),
+      }),
+    )
     .max(24),
   stages: stagesSchema,
   validity_days: z.int().min(1).max(730),

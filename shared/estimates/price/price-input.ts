@@ -22,6 +22,7 @@ export interface GoodsShare {
 export interface PriceGoods {
   readonly head: 'leaf' | 'materials';
   readonly itemId: string;
+  readonly name: string;
   /** What it comes to, in the workshop's currency; rounded half up to the minor unit before it is shared out. */
   readonly cost: DecimalText;
   readonly shares: readonly GoodsShare[];

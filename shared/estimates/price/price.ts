@@ -48,6 +48,8 @@ export interface PriceLineCost {
 export interface PriceHead {
   readonly head: CostHead;
   readonly itemId: string | null;
+  /** Name of the grade, the leaf or the material; empty where the head is one. */
+  readonly name: string;
   readonly hours: number;
   readonly cost_minor: MinorUnits;
 }

@@ -1,0 +1,30 @@
+import type { PriceLines } from '#shared/estimates/price/price';
+import type { PriceInput } from '#shared/estimates/price/price-input';
+import type { Finding } from '#shared/words/finding';
+
+function missingGrades(input: PriceInput): Finding[] {
+  const known = new Set(input.card.grades.map((grade) => grade.id));
+  const extras = input.extras.filter((extra) => extra.kind === 'labour');
+  const asked = new Set([...input.labour, ...extras].map((entry) => entry.gradeId));
+  return [...asked]
+    .filter((gradeId) => !known.has(gradeId))
+    .map((grade) => ({ kind: 'missing', code: 'price-grade-missing', values: { grade } }));
+}
+
+function missingTaxes(lines: PriceLines, input: PriceInput): Finding[] {
+  const known = new Set(input.card.taxCategories.map((category) => category.id));
+  const asked = new Set(lines.lines.map((line) => line.taxCategoryId));
+  return [...asked]
+    .filter((taxCategoryId) => !known.has(taxCategoryId))
+    .map((category) => ({ kind: 'missing', code: 'price-tax-missing', values: { category } }));
+}
+
+/** What is to be told about a price: rates that are not in the card, a discount that leaves nothing, work sold below its cost. */
+export function priceFindings(lines: PriceLines, profit_minor: number, input: PriceInput): Finding[] {
+  const findings = [...missingGrades(input), ...missingTaxes(lines, input)];
+  if (lines.net_minor < 0)
+    findings.push({ kind: 'refuse', code: 'price-below-nothing', values: { net_minor: lines.net_minor } });
+  else if (profit_minor < 0)
+    findings.push({ kind: 'warn', code: 'price-below-cost', values: { loss_minor: -profit_minor } });
+  return findings;
+}

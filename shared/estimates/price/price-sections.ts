@@ -1,0 +1,30 @@
+import type { PriceLine } from '#shared/estimates/price/price';
+import { type WorkKind, workKinds } from '#shared/estimates/price/work-kind';
+import type { MinorUnits } from '#shared/money/decimal';
+import { sumMinor } from '#shared/money/sum-minor';
+
+/** Lines of one member (null: of the job as a whole) or one kind of work, and what they come to. */
+export interface PriceSection<Key> {
+  readonly key: Key;
+  readonly lines: readonly PriceLine[];
+  readonly price_minor: MinorUnits;
+}
+
+function sectionsBy<Key>(lines: readonly PriceLine[], keyOf: (line: PriceLine) => Key): PriceSection<Key>[] {
+  return [...new Set(lines.map(keyOf))].map((key) => {
+    const own = lines.filter((line) => keyOf(line) === key);
+    return { key, lines: own, price_minor: sumMinor(own.map((line) => line.price_minor)) };
+  });
+}
+
+/** Lines member by member, the job as a whole last; whole minor units. The sections sum to the subtotal whichever way they are cut. */
+export function sectionsByMember(lines: readonly PriceLine[]): PriceSection<string | null>[] {
+  const sections = sectionsBy(lines, (line) => line.memberId);
+  return [...sections.filter((section) => section.key !== null), ...sections.filter((section) => section.key === null)];
+}
+
+/** Lines by kind of work in the order of the work; whole minor units. */
+export const sectionsByKind = (lines: readonly PriceLine[]): PriceSection<WorkKind>[] =>
+  sectionsBy(lines, (line) => line.kind).toSorted(
+    (one, other) => workKinds.indexOf(one.key) - workKinds.indexOf(other.key),
+  );

@@ -1,0 +1,42 @@
+import { directOf, hoursOf, labourOf, type LineWork } from '#shared/estimates/price/line-work';
+import type { PriceInput } from '#shared/estimates/price/price-input';
+import { D, type MinorUnits } from '#shared/money/decimal';
+import { priceFactor } from '#shared/money/margin';
+import { exactMinor } from '#shared/money/minor-of';
+import { roundMinor } from '#shared/money/round-minor';
+
+/**
+ * How the price of a line arises, from what stands on that line alone:
+ *
+ *   direct       = its labour + consumables on it + its goods
+ *   overhead     = its hours × rate, or its labour cost × share
+ *   contingency  = its direct cost × share
+ *   price        = (direct + overhead + contingency) × factor, rounded half up once
+ *
+ * so an hour more moves its own line and no other. Four things are totals before they are lines, and are shared out: leaf and materials
+ * bought for the job (on the cost side), contingency from risk (by direct cost), insurance of the price itself, and an agreed lump sum.
+ */
+export interface PricedWork {
+  readonly work: LineWork;
+  /** Unrounded minor units, all four. */
+  readonly direct: D;
+  readonly overhead: D;
+  readonly contingency: D;
+  readonly unrounded: D;
+  /** The price of record, before discount and tax. */
+  readonly price_minor: MinorUnits;
+}
+
+function overheadOf(line: LineWork, { card: { overhead }, digits }: PriceInput): D {
+  return overhead.way === 'per-hour'
+    ? hoursOf(line).times(exactMinor(overhead.perHour, digits))
+    : labourOf(line).times(overhead.percent).div(100);
+}
+
+/** A line with its price, given its contingency; a line with a price of its own keeps it. Unrounded minor units in. */
+export function pricedWork(work: LineWork, contingency: D, input: PriceInput): PricedWork {
+  const [direct, overhead] = [directOf(work), overheadOf(work, input)];
+  const worked = direct.plus(overhead).plus(contingency).times(priceFactor(input.profit));
+  const unrounded = work.price_minor === null ? worked : new D(work.price_minor);
+  return { work, direct, overhead, contingency, unrounded, price_minor: roundMinor(unrounded) };
+}

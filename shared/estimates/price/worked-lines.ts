@@ -1,0 +1,69 @@
+import { type GradeHours, labourItems } from '#shared/estimates/price/labour-items';
+import { boughtItem, type CostItem, directOf, hoursOf, type LineWork } from '#shared/estimates/price/line-work';
+import type { PriceGoods, PriceInput } from '#shared/estimates/price/price-input';
+import { type WorkKind, workKinds } from '#shared/estimates/price/work-kind';
+import { D } from '#shared/money/decimal';
+import { minorOf } from '#shared/money/minor-of';
+import { splitByLargestRemainder } from '#shared/money/split-by-largest-remainder';
+
+interface Place {
+  readonly memberId: string | null;
+  readonly kind: WorkKind;
+}
+
+interface Gathered extends Place {
+  readonly labour: GradeHours[];
+  readonly goods: CostItem[];
+}
+
+type PlaceFor = (place: Place) => Gathered;
+
+const idOf = ({ memberId, kind }: Place): string => `${memberId ?? 'general'}/${kind}`;
+
+/** What is bought once for the job is bought in whole booklets or packs: that total comes first and is shared out to the minor unit. */
+function shareOut(goods: PriceGoods, digits: number, placeFor: PlaceFor): void {
+  const total = minorOf(goods.cost, digits);
+  const used = goods.shares.filter((share) => share.weight > 0);
+  const shares = used.length > 0 ? used : [{ memberId: null, kind: 'other' as const, weight: 1 }];
+  const parts = splitByLargestRemainder(
+    total,
+    shares.map((share) => share.weight),
+  );
+  shares.forEach((share, place) => placeFor(share).goods.push(boughtItem(goods.head, new D(parts[place]), goods)));
+}
+
+function gathered(input: PriceInput): Gathered[] {
+  const places = new Map<string, Gathered>();
+  const placeFor: PlaceFor = ({ memberId, kind }) => {
+    const known = places.get(idOf({ memberId, kind })) ?? { memberId, kind, labour: [], goods: [] };
+    places.set(idOf(known), known);
+    return known;
+  };
+  for (const entry of input.labour) placeFor(entry).labour.push(entry);
+  for (const goods of input.goods) shareOut(goods, input.digits, placeFor);
+  return [...places.values()];
+}
+
+/** Members as they first appear, what belongs to the job as a whole last; within a member in the order of the work. */
+function inOrder(places: readonly Gathered[]): Gathered[] {
+  const members = [...new Set(places.map((place) => place.memberId))];
+  const rank = (place: Gathered) => (place.memberId === null ? members.length : members.indexOf(place.memberId));
+  return places.toSorted(
+    (one, other) => rank(one) - rank(other) || workKinds.indexOf(one.kind) - workKinds.indexOf(other.kind),
+  );
+}
+
+/** One line for each kind of work of each member, with what stands behind it; lines with nothing behind them are left out. */
+export function workedLines(input: PriceInput): LineWork[] {
+  const lines = inOrder(gathered(input)).map((place) => ({
+    id: idOf(place),
+    memberId: place.memberId,
+    kind: place.kind,
+    name: null,
+    taxCategoryId: input.taxCategoryId,
+    items: [...labourItems(place.labour, input), ...place.goods],
+    price_minor: null,
+    insured_percent: null,
+  }));
+  return lines.filter((line) => !directOf(line).isZero() || !hoursOf(line).isZero());
+}
