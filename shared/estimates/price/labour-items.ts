@@ -1,6 +1,5 @@
 import { boughtItem, type CostItem, sumOf } from '#shared/estimates/price/line-work';
 import type { PriceInput } from '#shared/estimates/price/price-input';
-import { D } from '#shared/money/decimal';
 import { exactFigure } from '#shared/money/exact-figure';
 import { exactMinor } from '#shared/money/minor-of';
 

@@ -27,9 +27,7 @@ function headsOf(items: readonly CostItem[]): PriceHead[] {
       before ? { ...before, hours: before.hours.plus(item.hours), cost: before.cost.plus(item.cost) } : item,
     );
   }
-  const heads = [...groups.values()].toSorted(
-    (one, other) => costHeads.indexOf(one.head) - costHeads.indexOf(other.head),
-  );
+  const heads = [...groups.values()].sort((one, other) => costHeads.indexOf(one.head) - costHeads.indexOf(other.head));
   const { parts } = roundedParts(heads.map((head) => head.cost));
   return heads.map(({ head, itemId, name, hours }, place) => ({
     head,

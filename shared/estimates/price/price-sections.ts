@@ -25,6 +25,6 @@ export function sectionsByMember(lines: readonly PriceLine[]): PriceSection<stri
 
 /** Lines by kind of work in the order of the work; whole minor units. */
 export const sectionsByKind = (lines: readonly PriceLine[]): PriceSection<WorkKind>[] =>
-  sectionsBy(lines, (line) => line.kind).toSorted(
+  sectionsBy(lines, (line) => line.kind).sort(
     (one, other) => workKinds.indexOf(one.key) - workKinds.indexOf(other.key),
   );

@@ -48,7 +48,7 @@ function gathered(input: PriceInput): Gathered[] {
 function inOrder(places: readonly Gathered[]): Gathered[] {
   const members = [...new Set(places.map((place) => place.memberId))];
   const rank = (place: Gathered) => (place.memberId === null ? members.length : members.indexOf(place.memberId));
-  return places.toSorted(
+  return [...places].sort(
     (one, other) => rank(one) - rank(other) || workKinds.indexOf(one.kind) - workKinds.indexOf(other.kind),
   );
 }
