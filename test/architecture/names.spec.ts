@@ -11,6 +11,7 @@ const namesForAnything = /(^|[-/.])(utils?|helpers?|common|types?|managers?|misc
 /** Files of equals, where no export is the main one. */
 const families = new Set([
   'shared/problems/entry-schema.ts',
+  'shared/problems/card-entry-schema.ts',
   'shared/units/exact-factors.ts',
   'shared/accounts/workshop-options.ts',
 ]);
@@ -26,15 +27,19 @@ const suffixes: readonly string[] = [...new Set(Object.values(sideOfSuffix).flat
 
 const suffixOf = (file: string): string | undefined => suffixes.find((suffix) => file.endsWith(`-${suffix}.ts`));
 
-const singular = (word: string): string => (word === 'people' ? 'person' : word.replace(/s$/, ''));
+/** A word of a file name in the forms an export may say it in. */
+const formsOf = (word: string): string[] => [word, word === 'people' ? 'person' : word.replace(/s$/, '')];
 
-/** Whether an identifier bears the name of its file; a schema or endpoints file may leave its ending to the folder's reader. */
+/** Whether an identifier bears the name of its file, to which the ending need not belong; a feature may have several routes. */
 function bearsNameOf(file: string, identifier: string): boolean {
   const suffix = suffixOf(file);
-  const isDescription = suffix === 'schema' || suffix === 'endpoints';
-  const asked = path.basename(file, '.ts').split('-').map(singular);
+  const asked = path
+    .basename(file, '.ts')
+    .split('-')
+    .slice(0, suffix ? -1 : undefined);
   const said = identifier.toLowerCase();
-  return asked.slice(0, isDescription ? -1 : undefined).every((word) => said.includes(word));
+  if (suffix === 'routes' && said.endsWith('routes')) return true;
+  return asked.every((word) => formsOf(word).some((form) => said.includes(form)));
 }
 
 function isNamedAfterItsExport(file: string): boolean {
@@ -91,8 +96,12 @@ describe('The check of names', () => {
     ['shared/leaf/leaf-schema.ts', 'leafEntry', true],
     ['shared/buildups/buildup-card.ts', 'BuildUpCard', true],
     ['shared/accounts/people-schema.ts', 'personSchema', true],
+    ['shared/accounts/people-endpoints.ts', 'listPeople', true],
     ['backend/src/jobs/job-service.ts', 'JobService', true],
-    ['backend/src/jobs/job-service.ts', 'Job', false],
+    ['backend/src/jobs/job-service.ts', 'Estimates', false],
+    ['backend/src/jobs/job-model.ts', 'jobTable', true],
+    ['frontend/src/app/accounts/accounts-routes.ts', 'memberRoutes', true],
+    ['frontend/src/app/accounts/accounts-routes.ts', 'members', false],
     ['frontend/src/app/leaf/leaf-page.ts', 'LeafPage', true],
   ])('%s exporting %s: %s', (file, identifier, bears) => {
     expect(bearsNameOf(file, identifier)).toBe(bears);
