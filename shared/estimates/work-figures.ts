@@ -1,0 +1,170 @@
+import { groundThickness } from '#shared/buildups/ground-thickness';
+import { sectionStrip } from '#shared/buildups/section-strip';
+import { calculatorVersion } from '#shared/estimates/calculator-version';
+import type { EstimateWork } from '#shared/estimates/estimate-work';
+import type {
+  GradeFigures,
+  LeafFigures,
+  MemberFigures,
+  Tally,
+  UseFigures,
+  WorkFigures,
+  ZoneFigures,
+  ZoneLeafFigures,
+} from '#shared/estimates/figures';
+import type { MeasuredMember } from '#shared/estimates/measured-member';
+import type { WorkedZone } from '#shared/estimates/worked-zone';
+import { bookletsFor } from '#shared/leaf/booklets-for';
+import type { LeafProduct } from '#shared/leaf/leaf-product';
+import type { RateCard } from '#shared/rate-cards/rate-card';
+import { tripleSum } from '#shared/units/triple-sum';
+
+const nameOf = (items: readonly { readonly id: string; readonly name: string }[], id: string): string =>
+  items.find((item) => item.id === id)?.name ?? id;
+
+const sum = (figures: readonly number[]): number => figures.reduce((total, figure) => total + figure, 0);
+
+function memberFigures(measured: MeasuredMember, work: EstimateWork, card: RateCard): MemberFigures {
+  const { member, surface, areas } = measured;
+  const uses = work.carving.uses.filter((use) => member.ornaments.some((own) => own.id === use.useId));
+  const zones = work.zones.filter((zone) => zone.memberId === member.id);
+  return {
+    memberId: member.id,
+    timber: nameOf(card.carving.timbers, member.timberId),
+    developed_mm2: surface.area_mm2,
+    girth_mm: surface.girth_mm ?? null,
+    run_mm: surface.run_mm ?? null,
+    uncertainty_mm2: surface.uncertainty_mm2 ?? null,
+    plan_mm2: areas.plan_mm2,
+    true_mm2: sum(areas.zones.map((zone) => zone.net_mm2)) + areas.bare_mm2,
+    bare_mm2: areas.bare_mm2,
+    parts: surface.parts,
+    carving_hours: tripleSum(uses.map((use) => use.carving)),
+    handsOn_hours: tripleSum(zones.map((zone) => zone.handsOn.hours)),
+    reasons: surface.reasons,
+  };
+}
+
+function zoneLeafFigures({ leaf }: WorkedZone, card: RateCard): ZoneLeafFigures | null {
+  const product = card.leaf.products.find((known) => known.id === leaf?.productId);
+  if (!leaf || !product) return null;
+  const { productId, way, netLeaves, grossLeaves, handled, reasons, laying } = leaf;
+  return {
+    ...{ productId, way, netLeaves, grossLeaves, handled, reasons },
+    name: product.name,
+    strips: laying?.way === 'lays' ? laying.chosen.strips : null,
+    cuts: laying?.way === 'patches' ? laying.cuts : null,
+    lap_mm: card.leaf.laps_mm[way],
+    side_mm: product.side_mm,
+  };
+}
+
+function zoneFigures(worked: WorkedZone, card: RateCard): ZoneFigures {
+  const { zone, area, buildUp, facts } = worked;
+  const metal = card.leaf.products.find((product) => product.id === zone.leafId)?.metal ?? null;
+  return {
+    zoneId: zone.id,
+    memberId: worked.memberId,
+    buildUp: buildUp?.name ?? zone.buildUpId,
+    finish: worked.finish,
+    plan_mm2: area.plan_mm2,
+    true_mm2: area.net_mm2,
+    ground_mm: buildUp ? groundThickness(buildUp, facts, card.buildUps).thickness_mm : 0,
+    hours: worked.handsOn.hours,
+    steps: worked.handsOn.steps.map(({ stepId, kind, name, gradeId, coats, hours, reasons }) => ({
+      ...{ stepId, kind, name, gradeId, coats, hours, reasons },
+    })),
+    layers: buildUp ? sectionStrip(buildUp, facts, metal) : [],
+    leaf: zoneLeafFigures(worked, card),
+    reasons: area.reasons,
+  };
+}
+
+function useFigures(work: EstimateWork, card: RateCard): UseFigures[] {
+  const items = [...card.carving.ornaments, ...card.carving.items];
+  return work.carving.uses.map(({ useId, ornamentId, quantity, fit, factor, carving, reasons }) => ({
+    ...{ useId, quantity, fit, factor, carving, reasons },
+    memberId: work.members.find(({ member }) => member.ornaments.some((own) => own.id === useId))?.member.id ?? '',
+    ornament: nameOf(items, ornamentId),
+  }));
+}
+
+const leafFigures = (work: EstimateWork, card: RateCard): LeafFigures[] =>
+  work.leaf.map(
+    ({
+      productId,
+      netLeaves,
+      grossLeaves,
+      grossLeaves_p10,
+      grossLeaves_p90,
+      booklets,
+      coverage,
+      mass_grams,
+      reasons,
+    }) => ({
+      ...{
+        productId,
+        netLeaves,
+        grossLeaves,
+        grossLeaves_p10,
+        grossLeaves_p90,
+        booklets,
+        coverage,
+        mass_grams,
+        reasons,
+      },
+      name: nameOf(card.leaf.products, productId),
+    }),
+  );
+
+function gradeFigures(work: EstimateWork, card: RateCard): GradeFigures[] {
+  return card.money.grades.flatMap(({ id, name }) => {
+    const hours = sum(work.labour.filter((entry) => entry.gradeId === id).map((entry) => entry.hours));
+    return hours > 0 ? [{ gradeId: id, name, hours }] : [];
+  });
+}
+
+function bookletsAt(
+  work: EstimateWork,
+  card: RateCard,
+  leavesOf: (total: EstimateWork['leaf'][number]) => number,
+): number {
+  const products = new Map<string, LeafProduct>(card.leaf.products.map((product) => [product.id, product]));
+  return sum(
+    work.leaf.map((total) => {
+      const product = products.get(total.productId);
+      return product ? bookletsFor(product, leavesOf(total)) : 0;
+    }),
+  );
+}
+
+const tallyOf = (work: EstimateWork, card: RateCard, members: readonly MemberFigures[]): Tally => ({
+  members: sum(work.members.map(({ member }) => member.count)),
+  true_mm2: sum(members.map((member) => member.true_mm2)),
+  carving_hours: work.carving.total,
+  handsOn_hours: tripleSum(work.zones.map((zone) => zone.handsOn.hours)),
+  booklets: sum(work.leaf.map((total) => total.booklets)),
+  booklets_p10: bookletsAt(work, card, (total) => total.grossLeaves_p10),
+  booklets_p90: bookletsAt(work, card, (total) => total.grossLeaves_p90),
+});
+
+/** The figures of an estimate's work, without a word of money: areas mm², hours decimal, leaves not rounded, booklets whole. */
+export function workFigures(work: EstimateWork, card: RateCard): WorkFigures {
+  const members = work.members.map((measured) => memberFigures(measured, work, card));
+  const { rows, total, sharpening, patterns, reasons } = work.carving;
+  return {
+    calculatorVersion,
+    tally: tallyOf(work, card, members),
+    members,
+    zones: work.zones.map((zone) => zoneFigures(zone, card)),
+    uses: useFigures(work, card),
+    carving: { rows, total, sharpening, patterns, reasons },
+    grades: gradeFigures(work, card),
+    leaf: leafFigures(work, card),
+    materials: work.materials.map(({ materialId, name, unit, need, bought, reasons: because }) => ({
+      ...{ materialId, name, unit, need, bought, reasons: because },
+    })),
+    lots: work.lots,
+    findings: work.findings,
+  };
+}
