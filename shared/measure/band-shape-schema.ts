@@ -1,6 +1,5 @@
 import * as z from 'zod';
-import { areaEntry, fluted, lengthEntry } from '#shared/measure/figure-schema';
-import { paragraphs } from '#shared/problems/entry-schema';
+import { fluted, lengthEntry } from '#shared/measure/length-schema';
 
 const bandPartSchema = z.discriminatedUnion('part', [
   z.strictObject({ part: z.literal('straight'), length_mm: lengthEntry }),
@@ -20,12 +19,4 @@ export const bandShapeSchema = z.strictObject({
   // A stretch under a centimetre is a slip of the hand, and would fill the drawing with lines.
   stretch_mm: z.number().min(10).lt(1e5).optional(),
   ...fluted,
-});
-
-export const measuredShapeSchema = z.strictObject({
-  kind: z.literal('measured'),
-  area_mm2: areaEntry,
-  uncertainty_mm2: areaEntry,
-  note: paragraphs(500).min(1),
-  isTrueSurface: z.boolean(),
 });

@@ -8,7 +8,7 @@ import type { Surface } from '#shared/measure/surface';
 export function bandSurface(shape: BandShape): Surface {
   const length_mm = bandLength(shape.length);
   const { whole, stretch_mm, rest_mm } = bandStretches(shape);
-  const cut = shape.stretch_mm ? [because('measure-stretches', whole, 'number', { stretch_mm, rest_mm })] : [];
+  const cut = shape.stretch_mm ? [because('measure-stretches', [whole, 'number'], { stretch_mm, rest_mm })] : [];
   const band = girthByRun({
     girth_mm: shape.height_mm,
     run_mm: length_mm,

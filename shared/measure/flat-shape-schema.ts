@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { displacementEntry, fluted, lengthEntry } from '#shared/measure/figure-schema';
+import { displacementEntry, fluted, lengthEntry } from '#shared/measure/length-schema';
 
 /** The flat faces of `FlatShape`, one schema each. */
 export const flatShapeSchemas = [

@@ -20,6 +20,6 @@ export function flutedSurface(plain: Surface, fluting: Fluting | undefined): Sur
     courses: [],
     laying: plain.laying === 'sheets' ? 'lays' : plain.laying,
     finish: 'moulded',
-    reasons: [...plain.reasons, because('measure-fluting', factor, 'factor')],
+    reasons: [...plain.reasons, because('measure-fluting', [factor, 'factor'])],
   };
 }

@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { endsSchema, fluted, lengthEntry } from '#shared/measure/figure-schema';
+import { endsSchema, fluted, lengthEntry } from '#shared/measure/length-schema';
 
 const handEntry = z.enum(['left', 'right']);
 const turnsEntry = z.number().min(0).max(1000);

@@ -19,7 +19,7 @@ export function legSurface(shape: StraightLegShape): Surface {
     girth_mm: (perWidth * (top_mm + foot_mm)) / 2,
     run_mm: slant_mm,
     laying: 'lays',
-    reasons: [because('measure-slant', slant_mm - length_mm, 'mm')],
+    reasons: [because('measure-slant', [slant_mm - length_mm, 'mm'])],
   });
   const end_mm2 = (width_mm: number) => (perWidth / 4) * width_mm * width_mm;
   return surfaceWithEnds(flutedSurface(sides, shape.fluting), shape.ends, [end_mm2(top_mm), end_mm2(foot_mm)]);

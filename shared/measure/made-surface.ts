@@ -3,12 +3,11 @@ import type { FigureUnit, Reason } from '#shared/words/reason';
 import type { WordCode, WordValues } from '#shared/words/word-code';
 
 /** One step of a surface's explanation: a code, what came out, in which unit, with what. */
-export const because = (code: WordCode, figure: number, unit: FigureUnit, values: WordValues = {}): Reason => ({
-  code,
-  values,
-  figure,
-  unit,
-});
+export const because = (
+  code: WordCode,
+  [figure, unit]: readonly [number, FigureUnit],
+  values: WordValues = {},
+): Reason => ({ code, values, figure, unit });
 
 /** A surface from what is particular to its shape; all else is as on a plain flat face. Areas in mm². */
 export const madeSurface = (facts: Pick<Surface, 'area_mm2'> & Partial<Surface>): Surface => ({
@@ -30,8 +29,8 @@ export const girthByRun = (facts: Partial<Surface> & { readonly girth_mm: number
     sides_mm: [facts.run_mm],
     ...facts,
     reasons: [
-      because('measure-girth', facts.girth_mm, 'mm'),
-      because('measure-run', facts.run_mm, 'mm'),
+      because('measure-girth', [facts.girth_mm, 'mm']),
+      because('measure-run', [facts.run_mm, 'mm']),
       ...(facts.reasons ?? []),
     ],
   });

@@ -11,7 +11,7 @@ export const measuredSurface = ({ area_mm2, uncertainty_mm2, note, isTrueSurface
     laying: isTrueSurface ? 'patches' : 'sheets',
     finish: isTrueSurface ? 'carved' : 'plain',
     reasons: [
-      because('measure-given', area_mm2, 'mm2', { note }),
-      because('measure-uncertainty', uncertainty_mm2, 'mm2'),
+      because('measure-given', [area_mm2, 'mm2'], { note }),
+      because('measure-uncertainty', [uncertainty_mm2, 'mm2']),
     ],
   });

@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { displacementEntry, endsSchema, fluted, lengthEntry } from '#shared/measure/figure-schema';
+import { displacementEntry, endsSchema, fluted, lengthEntry } from '#shared/measure/length-schema';
 import { classicalMembers } from '#shared/measure/profile-element';
 
 const drawn = { id: z.string().min(1).max(64), across_mm: displacementEntry, up_mm: displacementEntry };

@@ -41,8 +41,8 @@ export function mouldingSurface(shape: MouldingShape): Surface {
     laying: 'lays',
     finish: 'moulded',
     reasons: [
-      because('measure-profile-girth', profile.girth_mm, 'mm', { elements: profile.elements.length }),
-      because('measure-plan-run', run_mm, 'mm', { offset_mm: Math.abs(offset_mm), edge: shape.measuredAt }),
+      because('measure-profile-girth', [profile.girth_mm, 'mm'], { elements: profile.elements.length }),
+      because('measure-plan-run', [run_mm, 'mm'], { offset_mm: Math.abs(offset_mm), edge: shape.measuredAt }),
     ],
   });
   return flutedSurface(surface, shape.fluting);

@@ -58,11 +58,11 @@ interface Field {
 }
 
 function fieldReasons({ member, openings_mm2 }: Field, relief: Relief): Reason[] {
-  const developed = because('measure-developed', member.surface.area_mm2, 'mm2');
+  const developed = because('measure-developed', [member.surface.area_mm2, 'mm2']);
   if (openings_mm2 === 0) return [developed];
-  if (relief === 'pierced') return [developed, because('measure-pierced-whole', member.surface.area_mm2, 'mm2')];
+  if (relief === 'pierced') return [developed, because('measure-pierced-whole', [member.surface.area_mm2, 'mm2'])];
   const count = member.openings.reduce((sum, opening) => sum + opening.count, 0);
-  return [developed, because('measure-openings', openings_mm2, 'mm2', { count })];
+  return [developed, because('measure-openings', [openings_mm2, 'mm2'], { count })];
 }
 
 function zoneArea({ id, take, relief }: MeasuredZone, field: Field): ZoneArea {
@@ -84,12 +84,12 @@ function zoneArea({ id, take, relief }: MeasuredZone, field: Field): ZoneArea {
     reasons: [
       ...fieldReasons(field, relief),
       taken.girth_mm === undefined
-        ? because('measure-zone-share', taken.share * 100, 'percent')
-        : because('measure-zone-parts', taken.share * 100, 'percent', { girth_mm: taken.girth_mm }),
-      because('measure-members', count, 'pieces'),
-      because('measure-plan-area', plan_mm2, 'mm2'),
+        ? because('measure-zone-share', [taken.share * 100, 'percent'])
+        : because('measure-zone-parts', [taken.share * 100, 'percent'], { girth_mm: taken.girth_mm }),
+      because('measure-members', [count, 'pieces']),
+      because('measure-plan-area', [plan_mm2, 'mm2']),
       factor,
-      because('measure-net', net_mm2, 'mm2'),
+      because('measure-net', [net_mm2, 'mm2']),
     ],
   };
 }

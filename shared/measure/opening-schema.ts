@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { measuredShapeSchema } from '#shared/measure/band-shape-schema';
+import { measuredShapeSchema } from '#shared/measure/measured-shape-schema';
 import { flatShapeSchemas } from '#shared/measure/flat-shape-schema';
 import { complainOfImpossible } from '#shared/measure/shape-schema';
 import { count, identifier } from '#shared/problems/entry-schema';

@@ -33,13 +33,13 @@ const total = (figures: readonly number[]) => figures.reduce((sum, figure) => su
 // Length × girth (A Key to Civil Architecture, 1774).
 const plainArea = ({ lengths }: Extract<PaidWork, { rule: 'plain-area' }>): Reckoned => ({
   quantity_mm2: total(lengths.map(({ length_mm, girth_mm }) => length_mm * girth_mm)),
-  reasons: [because('paid-plain', total(lengths.map(({ length_mm }) => length_mm)), 'mm')],
+  reasons: [because('paid-plain', [total(lengths.map(({ length_mm }) => length_mm)), 'mm'])],
 });
 
 // Carved work is measured flat and paid twice, each side that is worked (IS 1200 Part 15).
 const carvedEachSide = ({ area_mm2, sides }: Extract<PaidWork, { rule: 'carved-each-side' }>): Reckoned => ({
   quantity_mm2: 2 * area_mm2 * sides,
-  reasons: [because('paid-carved-twice', 2 * sides, 'factor', { sides })],
+  reasons: [because('paid-carved-twice', [2 * sides, 'factor'], { sides })],
 });
 
 // Under 6 in counts as 6, from 6 to under 12 as 12, from 12 on as measured (An Old Hand, Hints for Painters). Nothing stays nothing.
@@ -52,13 +52,13 @@ function paidGirth(girth_mm: number): number {
 function narrowGirth({ length_mm, girth_mm }: Extract<PaidWork, { rule: 'narrow-girth' }>): Reckoned {
   const paid_mm = paidGirth(girth_mm);
   const code = paid_mm > girth_mm ? 'paid-girth-raised' : 'paid-girth-as-measured';
-  return { quantity_mm2: length_mm * paid_mm, reasons: [because(code, paid_mm, 'mm', { girth_mm })] };
+  return { quantity_mm2: length_mm * paid_mm, reasons: [because(code, [paid_mm, 'mm'], { girth_mm })] };
 }
 
 // Work worth so many times plain counts as so many times its yards (White).
 const weighted = ({ areas }: Extract<PaidWork, { rule: 'weighted' }>): Reckoned => ({
   quantity_mm2: total(areas.map(({ area_mm2, worth }) => area_mm2 * worth)),
-  reasons: areas.map(({ area_mm2, worth }) => because('paid-weighted', area_mm2 * worth, 'mm2', { area_mm2, worth })),
+  reasons: areas.map(({ area_mm2, worth }) => because('paid-weighted', [area_mm2 * worth, 'mm2'], { area_mm2, worth })),
 });
 
 function reckoned(work: PaidWork): Reckoned {
@@ -78,5 +78,5 @@ function reckoned(work: PaidWork): Reckoned {
 export function paidQuantity(work: PaidWork): PaidQuantity {
   const { quantity_mm2, reasons } = reckoned(work);
   if (!(quantity_mm2 >= 0 && quantity_mm2 < Infinity)) throw new RangeError('a quantity must not be negative');
-  return { rule: work.rule, quantity_mm2, reasons: [...reasons, because('paid-quantity', quantity_mm2, 'mm2')] };
+  return { rule: work.rule, quantity_mm2, reasons: [...reasons, because('paid-quantity', [quantity_mm2, 'mm2'])] };
 }

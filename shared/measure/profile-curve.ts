@@ -23,7 +23,7 @@ function quadrant(from: Point, to: Point, form: 'round' | 'hollow'): Stroke {
 }
 
 // Two half-size curves, round below and hollow above or the other way; read upside down when the member goes in.
-function doubleCurve(from: Point, to: Point, lower: 'round' | 'hollow', curve: typeof quadrant): Stroke[] {
+function doubleCurve([from, to]: readonly [Point, Point], lower: 'round' | 'hollow', curve: typeof quadrant): Stroke[] {
   const middle = at((from.x + to.x) / 2, (from.y + to.y) / 2);
   const upper = lower === 'round' ? 'hollow' : 'round';
   return [curve(from, middle, lower), curve(middle, to, upper)];
@@ -67,11 +67,11 @@ function classicalStrokes(from: Point, member: ClassicalElement): Stroke[] {
     case 'cavetto':
       return [quadrant(from, to, 'hollow')];
     case 'cyma-recta':
-      return doubleCurve(from, to, isOut ? 'round' : 'hollow', quadrant);
+      return doubleCurve([from, to], isOut ? 'round' : 'hollow', quadrant);
     case 'cyma-reversa':
-      return doubleCurve(from, to, isOut ? 'hollow' : 'round', quadrant);
+      return doubleCurve([from, to], isOut ? 'hollow' : 'round', quadrant);
     case 'flat-cyma':
-      return doubleCurve(from, to, isOut ? 'round' : 'hollow', sixtyDegrees);
+      return doubleCurve([from, to], isOut ? 'round' : 'hollow', sixtyDegrees);
     case 'scotia':
       return scotia(from, member);
     default:

@@ -1,5 +1,6 @@
 import * as z from 'zod';
-import { bandShapeSchema, measuredShapeSchema } from '#shared/measure/band-shape-schema';
+import { bandShapeSchema } from '#shared/measure/band-shape-schema';
+import { measuredShapeSchema } from '#shared/measure/measured-shape-schema';
 import { flatShapeSchemas } from '#shared/measure/flat-shape-schema';
 import { legShapeSchemas } from '#shared/measure/leg-shape-schema';
 import { mouldingShapeSchema, turnedShapeSchema } from '#shared/measure/moulding-shape-schema';

@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { endsSchema, fluted, lengthEntry } from '#shared/measure/figure-schema';
+import { endsSchema, fluted, lengthEntry } from '#shared/measure/length-schema';
 
 const chosen = z.boolean();
 

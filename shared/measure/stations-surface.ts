@@ -42,9 +42,9 @@ function stationsSurface(samples: readonly Sample[], rule: (values: readonly Sam
     laying: 'patches',
     finish: 'moulded',
     reasons: [
-      because('measure-stations', girth_mm, 'mm', { stations: samples.length }),
-      because('measure-run', run_mm, 'mm'),
-      because('measure-uncertainty', uncertainty_mm2, 'mm2'),
+      because('measure-stations', [girth_mm, 'mm'], { stations: samples.length }),
+      because('measure-run', [run_mm, 'mm']),
+      because('measure-uncertainty', [uncertainty_mm2, 'mm2']),
     ],
   });
 }

@@ -52,5 +52,5 @@ function ofKind(shape: Shape): Surface {
 export function surfaceOf(shape: Shape): Surface {
   refuseImpossible(shape);
   const surface = ofKind(shape);
-  return { ...surface, reasons: [...surface.reasons, because('measure-developed', surface.area_mm2, 'mm2')] };
+  return { ...surface, reasons: [...surface.reasons, because('measure-developed', [surface.area_mm2, 'mm2'])] };
 }

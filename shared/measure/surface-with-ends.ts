@@ -11,6 +11,6 @@ export function surfaceWithEnds(sides: Surface, ends: Ends, [top_mm2, bottom_mm2
     area_mm2: sides.area_mm2 + ends_mm2,
     ends_mm2,
     laying: sides.laying === 'lays' ? 'sheets' : sides.laying,
-    reasons: [...sides.reasons, because('measure-ends', ends_mm2, 'mm2')],
+    reasons: [...sides.reasons, because('measure-ends', [ends_mm2, 'mm2'])],
   };
 }

@@ -41,8 +41,8 @@ function revolved(parts: readonly SurfacePart[]): Surface {
   const girth_mm = parts.reduce((sum, part) => sum + part.girth_mm, 0);
   const run_mm = girth_mm === 0 ? 0 : area_mm2 / girth_mm;
   const reasons = [
-    because('measure-profile-girth', girth_mm, 'mm', { elements: parts.length }),
-    because('measure-turned-run', run_mm, 'mm'),
+    because('measure-profile-girth', [girth_mm, 'mm'], { elements: parts.length }),
+    because('measure-turned-run', [run_mm, 'mm']),
   ];
   return madeSurface({
     area_mm2,
@@ -68,6 +68,6 @@ function withEndParts(turned: Surface, ends: readonly SurfacePart[]): Surface {
     run_mm,
     sides_mm,
     parts: [...turned.parts, ...ends],
-    reasons: [...turned.reasons, because('measure-ends', ends_mm2, 'mm2')],
+    reasons: [...turned.reasons, because('measure-ends', [ends_mm2, 'mm2'])],
   };
 }

@@ -26,7 +26,7 @@ export function twistedSurface(shape: TwistedShape): Surface {
     run_mm: shape.length_mm,
     laying: 'patches',
     finish: 'moulded',
-    reasons: [because('measure-twist', factor, 'factor')],
+    reasons: [because('measure-twist', [factor, 'factor'])],
   });
   return flutedSurface(twisted, shape.fluting);
 }
@@ -43,6 +43,6 @@ export function helicoidSurface({ radius_mm, coreRadius_mm, risePerTurn_mm, turn
     area_mm2: turns * turn_mm2,
     laying: 'patches',
     finish: 'moulded',
-    reasons: [because('measure-helicoid-turn', turn_mm2, 'mm2')],
+    reasons: [because('measure-helicoid-turn', [turn_mm2, 'mm2'])],
   });
 }

@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { shareEntry } from '#shared/measure/figure-schema';
+import { shareEntry } from '#shared/measure/length-schema';
 
 /** What a zone may take of its member: a share in per cent, or parts of the girth by their keys. */
 export const zoneTakeSchema = z.discriminatedUnion('way', [

@@ -1,6 +1,6 @@
 import icosphere from 'icosphere';
 import { ellipsePerimeter } from '#shared/geometry/ellipse-perimeter';
-import { meshArea, type Face, type Vertex } from '#shared/geometry/mesh-area';
+import { meshArea } from '#shared/geometry/mesh-area';
 import { planeMapping } from '#shared/geometry/plane-mapping';
 import { polygonArea } from '#shared/geometry/polygon';
 import { revolvedArea } from '#shared/geometry/revolved-area';
@@ -149,7 +149,7 @@ describe('Standard figures', () => {
     [2, 12.329063],
     [3, 12.506175],
   ])('S11: the mesh of npm icosphere 1.0.0 at level %d', (level, area) => {
-    const { positions, cells } = icosphere(level) as { positions: Vertex[]; cells: Face[] };
+    const { positions, cells } = icosphere(level);
     expect(Math.abs(meshArea(positions, cells) - area)).toBeLessThan(1e-6);
   });
 
