@@ -51,11 +51,14 @@ function halfRound(from: Point, { height_mm, projection_mm }: ClassicalElement):
   return [quarter(from, crown, centre), quarter(crown, at(from.x, from.y + height_mm), centre)];
 }
 
+// Going out, it stands forward of what lies below; going in, of what lies above: so a profile turned upside down stays the same.
 function fillet(from: Point, { id, height_mm, projection_mm, going }: ClassicalElement): ProfilePiece {
-  const foot = at(from.x + (going === 'out' ? projection_mm : -projection_mm), from.y);
-  const end = at(foot.x, foot.y + height_mm);
-  const face = { id, element: 'fillet', strokes: [line(foot, end)], end } as const;
-  return projection_mm === 0 ? face : { ...face, uncounted: line(from, foot) };
+  const isOut = going === 'out';
+  const foot = at(isOut ? from.x + projection_mm : from.x, from.y);
+  const head = at(foot.x, foot.y + height_mm);
+  const end = at(isOut ? head.x : head.x - projection_mm, head.y);
+  const face = { id, element: 'fillet', strokes: [line(foot, head)], end } as const;
+  return projection_mm === 0 ? face : { ...face, uncounted: isOut ? line(from, foot) : line(head, end) };
 }
 
 function classicalStrokes(from: Point, member: ClassicalElement): Stroke[] {

@@ -16,7 +16,8 @@ export type ClassicalMember = (typeof classicalMembers)[number];
 /**
  * A classical member, read from the bottom of the profile upwards. Height and projection are the box it fills; `going` says
  * whether it ends further out than it began, or further in. Bead, astragal and torus end where they began. A fillet counts its
- * face alone: the step beside it is not counted unless it is drawn as a line of its own.
+ * face alone: its projection is the step by which it stands forward of what lies below (going out) or above it (going in), and is
+ * not counted unless it is drawn as a line of its own.
  */
 export interface ClassicalElement {
   readonly id: string;

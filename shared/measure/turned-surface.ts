@@ -12,11 +12,11 @@ const end = (key: string, radius_mm: number): SurfacePart => ({
   area_mm2: Math.PI * radius_mm * radius_mm,
 });
 
-// Radii at the foot and the head of the profile; a fillet's uncounted step at the foot is part of the end it stands on.
+// Radii at the foot and the head of the profile; a fillet's uncounted step is part of the end it stands on.
 function endParts({ ends, radius_mm, profile }: TurnedShape): SurfacePart[] {
   const pieces = profileCurve(profile, radius_mm);
   const foot_mm = pieces[0]?.strokes[0].from.x ?? radius_mm;
-  const head_mm = pieces[pieces.length - 1]?.end.x ?? radius_mm;
+  const head_mm = pieces.at(-1)?.strokes.at(-1)?.to.x ?? radius_mm;
   return [...(ends.bottom ? [end('end-bottom', foot_mm)] : []), ...(ends.top ? [end('end-top', head_mm)] : [])];
 }
 

@@ -1,0 +1,47 @@
+import type { Point } from '#shared/geometry/point';
+import { strokeReach } from '#shared/geometry/stroke';
+import type { DrawingDimension, DrawingPath, DrawingView } from '#shared/measure/drawing/drawing';
+import { boxAround, dimension, madeView } from '#shared/measure/drawing/made-view';
+import { polylineData, spot } from '#shared/measure/drawing/path-data';
+import { placed, strokesData } from '#shared/measure/drawing/stroke-data';
+import { profileCurve, type ProfilePiece } from '#shared/measure/profile-curve';
+import type { ProfileElement } from '#shared/measure/profile-element';
+
+/** Paths of a profile's curve: its elements, and the steps that do not count as hidden lines. */
+const curvePaths = (pieces: readonly ProfilePiece[]): DrawingPath[] =>
+  pieces.flatMap(({ strokes, uncounted }): DrawingPath[] => [
+    { kind: 'outline', data: strokesData(strokes) },
+    ...(uncounted ? [{ kind: 'hidden' as const, data: strokesData([uncounted]) }] : []),
+  ]);
+
+// The height of each element stands on the right, clear of the furthest projection.
+const elementHeights = (pieces: readonly ProfilePiece[], right_mm: number): DrawingDimension[] =>
+  pieces.map(({ strokes, end }) =>
+    dimension(spot(right_mm, 0 - strokes[0].from.y), spot(right_mm, 0 - end.y), 'right'),
+  );
+
+/** The section of a moulding's profile, closed behind by hidden lines, with its overall and its elements' dimensions, in mm. */
+export function profileView(profile: readonly ProfileElement[]): DrawingView {
+  const pieces = profileCurve(profile);
+  const reach = pieces.flatMap(({ strokes }) => strokes.flatMap(strokeReach)).map((point) => placed(point, 'right'));
+  const { left_mm, top_mm, width_mm, height_mm } = boxAround(reach);
+  const [right_mm, bottom_mm] = [left_mm + width_mm, top_mm + height_mm];
+  const start: Point = pieces[0]?.strokes[0].from ?? { x: 0, y: 0 };
+  const end: Point = pieces[pieces.length - 1]?.end ?? start;
+  const behind = polylineData([
+    placed(start, 'right'),
+    spot(left_mm, 0 - start.y),
+    spot(left_mm, 0 - end.y),
+    placed(end, 'right'),
+  ]);
+  return madeView({
+    view: 'profile',
+    paths: [...curvePaths(pieces), { kind: 'hidden', data: behind }],
+    dimensions: [
+      dimension(spot(left_mm, bottom_mm), spot(right_mm, bottom_mm), 'below'),
+      dimension(spot(left_mm, top_mm), spot(left_mm, bottom_mm), 'left'),
+      ...(pieces.length > 1 ? elementHeights(pieces, right_mm) : []),
+    ],
+    reach,
+  });
+}
