@@ -1,0 +1,1 @@
+export { AccountsSession } from './accounts-session';

@@ -1,0 +1,23 @@
+import type { Routes } from '@angular/router';
+import { memberRoutes, strangerRoutes } from './accounts/accounts-routes';
+import { signedInGuard } from './core/session/signed-in-guard';
+import { firstPlace } from './shell/first-place';
+
+/** Every address of the application; a feature brings its own under its place, loaded when it is opened. */
+export const appRoutes: Routes = [
+  ...strangerRoutes,
+  {
+    path: '',
+    canMatch: [signedInGuard],
+    loadComponent: () => import('./shell/shell').then(({ Shell }) => Shell),
+    children: [
+      { path: '', pathMatch: 'full', redirectTo: firstPlace },
+      ...memberRoutes,
+      {
+        path: '**',
+        title: $localize`Nothing here`,
+        loadComponent: () => import('./shell/not-found-page').then(({ NotFoundPage }) => NotFoundPage),
+      },
+    ],
+  },
+];

@@ -1,0 +1,105 @@
+import { Injectable, computed, inject } from '@angular/core';
+import { currencyDigits } from '#shared/money/currency-digits';
+import type { MinorUnits } from '#shared/money/decimal';
+import { formatDecimal } from '#shared/units/format-decimal';
+import { formatLength } from '#shared/units/format-length';
+import { formatsFor } from '#shared/units/formats-for';
+import { Session } from '../session/session';
+import { CATALOGUE } from './catalogue';
+import { dayStyles, type DayStyle } from './day-styles';
+import { strangerSettings } from './stranger-settings';
+
+/** Writes figures, money, days and times as the workshop has them; everything is read from signals, so a change of setting shows at once. */
+@Injectable({ providedIn: 'root' })
+export class Formats {
+  private readonly session = inject(Session);
+  private readonly catalogue = inject(CATALOGUE);
+  private readonly reader = computed(() => this.session.workshop() ?? strangerSettings());
+
+  readonly locale = computed(() => this.reader().locale);
+  readonly currency = computed(() => this.reader().currency);
+  readonly lengthUnit = computed(() => this.reader().lengthUnit);
+  readonly timeZone = computed(() => this.reader().timeZone);
+  readonly currencyDigits = computed(() => currencyDigits(this.currency()));
+  readonly currencySign = computed(() => signOf(this.locale(), this.currency()));
+
+  /** What `say` and everything else writes figures with. */
+  readonly values = computed(() =>
+    formatsFor({
+      locale: this.locale(),
+      currency: this.currency(),
+      digits: this.currencyDigits(),
+      lengthUnit: this.lengthUnit(),
+      catalogue: this.catalogue,
+    }),
+  );
+
+  /** A figure with its unit: `figure('mm2', 215_400)` is 2,154 cm². Units as in `formatsFor`. */
+  figure(unit: string, figure: number): string {
+    return this.values().write(unit, figure);
+  }
+
+  length(length_mm: number): string {
+    return this.figure('mm', length_mm);
+  }
+
+  area(area_mm2: number): string {
+    return this.figure('mm2', area_mm2);
+  }
+
+  money(amount_minor: MinorUnits): string {
+    return this.figure('minor', amount_minor);
+  }
+
+  /** Money without its minor units, for a place where the whole figure stands beside it or in its explanation. */
+  wholeMoney(amount_minor: MinorUnits): string {
+    const options = {
+      style: 'currency',
+      currency: this.currency(),
+      maximumFractionDigits: 0,
+      numberingSystem: 'latn',
+    } as const;
+    return new Intl.NumberFormat(this.locale(), options).format(amount_minor / 10 ** this.currencyDigits());
+  }
+
+  /** A plain number with at most and at least so many decimals, grouped as the locale has it. */
+  number(figure: number, most = 2, least = 0): string {
+    const digits = { minimumFractionDigits: least, maximumFractionDigits: most };
+    return new Intl.NumberFormat(this.locale(), { numberingSystem: 'latn', ...digits }).format(figure + 0);
+  }
+
+  /** A number as somebody here would type it: ungrouped, with the locale's decimal sign. */
+  typed(figure: number): string {
+    return Number.isFinite(figure) ? formatDecimal(String(figure), this.locale()) : '';
+  }
+
+  /** A length in the unit the workshop does not use, for a reading marked ≈ beside the typed one. */
+  otherLength(length_mm: number): string {
+    return formatLength(length_mm, this.lengthUnit() === 'mm' ? 'in' : 'mm', this.locale()).replace('≈ ', '');
+  }
+
+  /** A day (2026-06-04) in words. */
+  day(day: string, style: DayStyle = 'dated'): string {
+    return new Intl.DateTimeFormat(this.locale(), { ...dayStyles[style], timeZone: 'UTC' }).format(
+      new Date(`${day}T00:00:00Z`),
+    );
+  }
+
+  /** The day of a moment, in the workshop's time zone. */
+  dayOf(moment: string | Date, style: DayStyle = 'dated'): string {
+    return new Intl.DateTimeFormat(this.locale(), { ...dayStyles[style], timeZone: this.timeZone() }).format(
+      new Date(moment),
+    );
+  }
+
+  /** The time of day of a moment, in the workshop's time zone. */
+  time(moment: string | Date): string {
+    const options = { hour: '2-digit', minute: '2-digit', timeZone: this.timeZone() } as const;
+    return new Intl.DateTimeFormat(this.locale(), options).format(new Date(moment));
+  }
+}
+
+function signOf(locale: string, currency: string): string {
+  const parts = new Intl.NumberFormat(locale, { style: 'currency', currency }).formatToParts(0);
+  return parts.find(({ type }) => type === 'currency')?.value ?? currency;
+}

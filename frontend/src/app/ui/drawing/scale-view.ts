@@ -1,0 +1,29 @@
+/** What a scale drawing needs of a view; the drawings of `shared/measure` fit it as they are. */
+export interface ScaleView {
+  readonly paths: readonly ScalePath[];
+  readonly dimensions: readonly ScaleDimension[];
+  readonly box: {
+    readonly left_mm: number;
+    readonly top_mm: number;
+    readonly width_mm: number;
+    readonly height_mm: number;
+  };
+}
+
+/** SVG path data in mm; `gold` is drawn in gold, `leaf` and `lap` are filled fields of a lay plan. */
+export interface ScalePath {
+  readonly kind: 'outline' | 'hidden' | 'axis' | 'gold' | 'leaf' | 'lap';
+  readonly data: string;
+}
+
+export interface ScalePoint {
+  readonly x_mm: number;
+  readonly y_mm: number;
+}
+
+export interface ScaleDimension {
+  readonly from: ScalePoint;
+  readonly to: ScalePoint;
+  readonly label_mm: number;
+  readonly side: 'above' | 'below' | 'left' | 'right';
+}

@@ -1,0 +1,53 @@
+import { ChangeDetectionStrategy, Component, computed, signal } from '@angular/core';
+import { NG_VALUE_ACCESSOR } from '@angular/forms';
+import { decimalSign } from '#shared/units/decimal-sign';
+import { parseLength } from '#shared/units/parse-length';
+import { Entry } from './entry';
+import { Field } from './field';
+import { TypedEntry, type ReadEntry } from './typed-entry';
+
+/** A length with its text as typed, so that 2 3/8 in is shown again as 2 3/8 in. */
+export interface TypedLength {
+  readonly text: string;
+  readonly mm: number;
+}
+
+/** A length in the workshop's unit, decimals or fractions; the form holds text and millimetres. The other unit is shown, marked ≈. */
+@Component({
+  selector: 'app-length-field',
+  imports: [Entry, Field],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './typed-entry.html',
+  providers: [{ provide: NG_VALUE_ACCESSOR, useExisting: LengthField, multi: true }],
+})
+export class LengthField extends TypedEntry<TypedLength> {
+  private readonly known_mm = signal<number | undefined>(undefined);
+
+  readonly unitText = computed(() => this.formats.lengthUnit());
+  override readonly otherReading = computed(() => {
+    const known = this.known_mm();
+    return known === undefined ? '' : this.formats.otherLength(known);
+  });
+
+  override writeValue(value: TypedLength | null): void {
+    super.writeValue(value);
+    this.known_mm.set(value?.mm);
+  }
+
+  protected override read(text: string): ReadEntry<TypedLength> {
+    const parsed = parseLength(text, {
+      unit: this.formats.lengthUnit(),
+      decimalSign: decimalSign(this.formats.locale()),
+    });
+    this.known_mm.set(parsed.ok ? parsed.mm : undefined);
+    return parsed.ok ? { ok: true, value: { text, mm: parsed.mm } } : parsed;
+  }
+
+  protected override write(value: TypedLength): string {
+    return value.text;
+  }
+
+  protected override unreadable(text: string): TypedLength {
+    return { text, mm: Number.NaN };
+  }
+}

@@ -1,0 +1,42 @@
+import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { Icon } from '../icon/icon';
+import type { IconName } from '../icon/icon-paths';
+
+/** What stands where nothing is yet: what would be here, why one wants it, and (as content) the step that brings it. */
+@Component({
+  selector: 'app-empty-state',
+  imports: [Icon],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    @if (icon(); as name) {
+      <app-icon [name]="name" />
+    }
+    <h3>{{ heading() }}</h3>
+    <p class="muted">{{ text() }}</p>
+    <div class="actions"><ng-content /></div>
+  `,
+  styles: `
+    :host {
+      display: grid;
+      gap: 8px;
+      justify-items: start;
+      max-width: 560px;
+      padding: 32px 0;
+    }
+
+    app-icon {
+      color: var(--ochre);
+      width: 32px;
+      height: 32px;
+    }
+
+    .actions {
+      margin-top: 8px;
+    }
+  `,
+})
+export class EmptyState {
+  readonly heading = input.required<string>();
+  readonly text = input.required<string>();
+  readonly icon = input<IconName>();
+}

@@ -1,0 +1,24 @@
+import { ChangeDetectionStrategy, Component, ElementRef, inject, input } from '@angular/core';
+import { RouterLink, RouterLinkActive } from '@angular/router';
+import type { TallyCell } from './tally-cell';
+
+/** The way through a job: its places in a row, each with its own figure under its name, gold under the one that is open. */
+@Component({
+  selector: 'app-tally-bar',
+  imports: [RouterLink, RouterLinkActive],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './tally-bar.html',
+  styleUrl: './tally-bar.scss',
+})
+export class TallyBar {
+  private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
+
+  readonly cells = input.required<readonly TallyCell[]>();
+
+  /** On a phone the row is wider than the screen; the open place comes into view. */
+  protected show(isOpen: boolean, index: number): void {
+    if (!isOpen) return;
+    const cell = this.host.nativeElement.querySelectorAll('a')[index];
+    cell?.scrollIntoView?.({ block: 'nearest', inline: 'center' });
+  }
+}

@@ -1,0 +1,26 @@
+import '@angular/localize/init';
+import { setupZonelessTestEnv } from 'jest-preset-angular/setup-env/zoneless';
+import * as z from 'zod';
+
+setupZonelessTestEnv({ errorOnUnknownElements: true, errorOnUnknownProperties: true });
+z.config({ jitless: true });
+
+/** jsdom lays nothing out, so nothing ever changes its size. */
+class StillObserver implements ResizeObserver {
+  observe(): void {}
+  unobserve(): void {}
+  disconnect(): void {}
+}
+
+globalThis.ResizeObserver ??= StillObserver;
+
+/** No media query holds: neither dark, nor a phone, nor reduced motion. */
+const noMatch = (media: string) => ({
+  media,
+  matches: false,
+  onchange: null,
+  addEventListener() {},
+  removeEventListener() {},
+  dispatchEvent: () => false,
+});
+globalThis.matchMedia ??= ((media: string) => noMatch(media)) as unknown as typeof matchMedia;
