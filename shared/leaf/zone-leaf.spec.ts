@@ -1,0 +1,228 @@
+import fc from 'fast-check';
+import { startLeaf } from '#shared/leaf/start-leaf';
+import { zoneLeaf } from '#shared/leaf/zone-leaf';
+import type { ZoneLeafInput } from '#shared/leaf/zone-leaf-input';
+import type { Surface } from '#shared/measure/surface';
+import { en } from '#shared/words/en';
+import { say } from '#shared/words/say';
+
+// A top edge: an ovolo of 47.1 mm girth over a fillet of 12 mm, run 2,860 mm.
+const edge: Surface = {
+  area_mm2: 59.1 * 2860,
+  girth_mm: 59.1,
+  run_mm: 2860,
+  closedRun: false,
+  sides_mm: [2860],
+  parts: [
+    { key: 'ovolo', element: 'ovolo', girth_mm: 47.1, area_mm2: 47.1 * 2860 },
+    { key: 'fillet', element: 'fillet', girth_mm: 12, area_mm2: 12 * 2860 },
+  ],
+  courses: [],
+  laying: 'lays',
+  finish: 'moulded',
+  isTrueSurface: false,
+  reasons: [],
+};
+
+const field: Surface = {
+  ...edge,
+  area_mm2: 782 * 392,
+  girth_mm: undefined,
+  run_mm: undefined,
+  sides_mm: [],
+  parts: [],
+  courses: [{ length_mm: 782, height_mm: 392, closed: false }],
+  laying: 'sheets',
+  finish: 'plain',
+};
+
+const usual: ZoneLeafInput = {
+  zoneId: 'zone',
+  productId: 'gold-23-5-loose',
+  ground: { system: 'water', finish: 'water-burnished', isSealed: false, isOutdoors: false },
+  surface: edge,
+  partKeys: ['ovolo'],
+  share: 1,
+  openings_mm2: 0,
+  members: 1,
+  relief: 'middle',
+  reliefFactor: 1.35,
+  way: null,
+  strips: null,
+  cuts: null,
+  pieceCost: 0.44,
+};
+
+const laid = (changed: Partial<ZoneLeafInput> = {}) => zoneLeaf({ ...usual, ...changed }, startLeaf);
+const codes = (changed: Partial<ZoneLeafInput>) => laid(changed).findings.map(({ kind, code }) => `${kind} ${code}`);
+
+describe('zoneLeaf', () => {
+  it('takes 41.9 leaves for an ovolo of egg and dart, 40 to 46', () => {
+    const ovolo = laid();
+    expect(ovolo.netLeaves).toBeCloseTo(34.2, 9);
+    expect(ovolo.trueArea_mm2).toBeCloseTo(181_853.1, 6);
+    expect(ovolo.grossLeaves.likely).toBeCloseTo(41.904, 3);
+    expect(ovolo.grossLeaves.low).toBeCloseTo(38.078, 3);
+    expect(ovolo.grossLeaves.high).toBeCloseTo(48.9699, 4);
+    expect(ovolo.grossLeaves_p10).toBeCloseTo(40.1, 1);
+    expect(ovolo.grossLeaves_p90).toBeCloseTo(46.17, 1);
+    expect(ovolo.handled.likely).toBeCloseTo(125.712, 3);
+  });
+
+  it('says why', () => {
+    const word = say(en, { locale: 'en-GB', write: (unit, figure) => `${Math.round(figure * 10) / 10} ${unit}` });
+    const told = laid().reasons.map(
+      ({ code, values, figure }) => `${word(code, values)}: ${Math.round(Number(figure) * 100) / 100}`,
+    );
+    expect(told).toEqual([
+      'pieces along, 2860 mm in steps of 76.8 mm: 38',
+      'lays across, 47.1 mm in steps of 23.5 mm: 2',
+      '3 strips a leaf: 25.33',
+      'relief, middle: 1.35',
+      'net, for 181853.1 mm2 of true surface: 34.2',
+      'second laying: 5',
+      'faulting of the rest: 12',
+      'breakage: 0.95',
+      'leaves, 40.1 to 46.2: 41.9',
+    ]);
+  });
+
+  it('names the house value behind each loss', () => {
+    expect(laid().reasons.flatMap(({ house }) => house ?? [])).toEqual([
+      'measure.reliefFactors',
+      'leaf.secondLaying_percent.water-burnished.lays',
+      'leaf.losses.lays.faulting_percent',
+      'leaf.losses.lays.breakage_percent',
+    ]);
+  });
+
+  it('lays the matte fillet nearly twice over', () => {
+    const fillet = laid({
+      partKeys: ['fillet'],
+      relief: 'flat',
+      reliefFactor: 1,
+      ground: { ...usual.ground, finish: 'water-matte' },
+    });
+    expect(fillet.netLeaves).toBeCloseTo(6.333, 3);
+    expect(fillet.grossLeaves.likely).toBeCloseTo(13.333, 3);
+    expect(fillet.reasons.find(({ code }) => code === 'leaf-strips')?.values).toEqual({ strips: 6 });
+  });
+
+  it('counts a share on the whole moulding and splits it', () => {
+    const plain = { partKeys: null, relief: 'flat', reliefFactor: 1, strips: 3 } as const;
+    const whole = laid(plain).netLeaves;
+    expect(whole).toBeCloseTo(38, 9);
+    expect(laid({ ...plain, share: 0.25 }).netLeaves).toBeCloseTo(whole / 4, 9);
+    expect(laid({ ...plain, share: 0.25 }).netLeaves + laid({ ...plain, share: 0.75 }).netLeaves).toBeCloseTo(whole, 9);
+  });
+
+  it('counts one member and multiplies', () => {
+    expect(laid({ members: 7 }).grossLeaves.likely).toBeCloseTo(7 * laid().grossLeaves.likely, 9);
+    expect(laid({ members: 7 }).trueArea_mm2).toBeCloseTo(7 * laid().trueArea_mm2, 6);
+  });
+
+  it('leaves out openings', () => {
+    const half = laid({
+      surface: field,
+      partKeys: null,
+      openings_mm2: (782 * 392) / 2,
+      relief: 'flat',
+      reliefFactor: 1,
+    });
+    expect(half.netLeaves).toBeCloseTo(25, 9);
+    expect(half.planArea_mm2).toBeCloseTo((782 * 392) / 2, 6);
+  });
+
+  it('runs outer parts of a curved moulding at their own length', () => {
+    const curved = { ...edge, parts: [{ key: 'outer', element: 'fillet', girth_mm: 12, area_mm2: 12 * 3200 }] };
+    const outer = laid({ surface: curved, partKeys: ['outer'], relief: 'flat', reliefFactor: 1 });
+    expect(outer.laying).toMatchObject({ way: 'lays', run_mm: 3200 });
+  });
+
+  it('lays in patches when asked', () => {
+    const patched = laid({ way: 'patches', cuts: 2 });
+    expect(patched.netLeaves).toBeCloseTo(33.5711, 4);
+    expect(patched.handled.likely).toBeCloseTo(patched.grossLeaves.likely, 9);
+  });
+
+  it('lays lays on a single narrow field', () => {
+    const band = { ...field, area_mm2: 771.2 * 40, courses: [{ length_mm: 771.2, height_mm: 40, closed: false }] };
+    const narrow = laid({ surface: band, partKeys: null, way: 'lays', strips: 2, relief: 'flat', reliefFactor: 1 });
+    expect(narrow.netLeaves).toBeCloseTo(5, 9);
+  });
+
+  it('takes nothing for nothing', () => {
+    const none = laid({ surface: { ...edge, area_mm2: 0, girth_mm: 0, run_mm: 0 }, partKeys: null });
+    expect(none.grossLeaves).toEqual({ low: 0, likely: 0, high: 0 });
+    expect(laid({ members: 0 }).grossLeaves.likely).toBe(0);
+  });
+
+  it.each([
+    ['a leaf the card does not have', { productId: 'gone' }, 'missing leaf-unknown'],
+    ['a part that is no longer in the shape', { partKeys: ['cyma'] }, 'missing leaf-parts-unknown'],
+    ['strips narrower than two laps', { productId: 'gold-23-5-loose', strips: 13 }, 'refuse leaf-strips-too-narrow'],
+    ['cuts smaller than two laps', { way: 'patches', cuts: 13 }, 'refuse leaf-cuts-too-small'],
+  ] as const)('tells of %s', (_what, changed, finding) => {
+    expect(codes(changed)).toContain(finding);
+  });
+
+  it('counts in patches, and says so, where a shape has nothing to lay along', () => {
+    const round = { ...field, courses: [] };
+    const told = laid({ surface: round, partKeys: null, way: 'lays' });
+    expect(told.laying?.way).toBe('patches');
+    expect(told.findings.map(({ code }) => code)).toContain('leaf-lays-need-run');
+  });
+
+  it('refuses laps that leave nothing of a leaf', () => {
+    const card = { ...startLeaf, laps_mm: { ...startLeaf.laps_mm, lays: 40 } };
+    expect(zoneLeaf(usual, card)).toMatchObject({
+      laying: null,
+      netLeaves: 0,
+      findings: [{ kind: 'refuse', code: 'leaf-lap-too-wide' }],
+    });
+  });
+
+  it('counts ribbon in rolls and hands its metres on', () => {
+    const [first] = startLeaf.products;
+    const ribbon = {
+      ...first,
+      id: 'ribbon',
+      form: 'ribbon',
+      side_mm: 50,
+      ribbon_mm: 20_000,
+      leavesPerBooklet: 1,
+    } as const;
+    const card = { ...startLeaf, products: [ribbon] };
+    const fillet = {
+      ...usual,
+      productId: 'ribbon',
+      surface: { ...field, area_mm2: 4000 * 50, courses: [{ length_mm: 4000, height_mm: 50, closed: false }] },
+    };
+    const rolled = zoneLeaf({ ...fillet, partKeys: null, relief: 'flat', reliefFactor: 1 }, card);
+    expect(rolled.netLeaves).toBeCloseTo(0.2, 9);
+    expect(rolled.handled.likely).toBeCloseTo(rolled.grossLeaves.likely * 20, 9);
+    expect(rolled.way).toBe('sheets');
+  });
+
+  const ways = fc.constantFrom('sheets' as const, 'lays' as const, 'patches' as const);
+  const length = fc.double({ min: 1, max: 3000, noNaN: true });
+
+  it('never lays less leaf than there is true surface, and never draws less than it lays', () => {
+    fc.assert(
+      fc.property(
+        length,
+        length,
+        ways,
+        fc.double({ min: 0.01, max: 1, noNaN: true }),
+        (girth_mm, run_mm, way, share) => {
+          const surface = { ...edge, girth_mm, run_mm, area_mm2: girth_mm * run_mm * 1.02 };
+          const zone = laid({ surface, partKeys: null, way, share });
+          expect(zone.netLeaves * 6400).toBeGreaterThanOrEqual(zone.trueArea_mm2 * (1 - 2e-6));
+          expect(zone.grossLeaves.low).toBeGreaterThanOrEqual(zone.netLeaves);
+          expect(zone.grossLeaves_p10).toBeGreaterThanOrEqual(zone.grossLeaves.low - 1e-9);
+          expect(zone.grossLeaves_p90).toBeLessThanOrEqual(zone.grossLeaves.high + 1e-9);
+        },
+      ),
+    );
+  });
+});
