@@ -106,3 +106,7 @@ export function profileCurve(profile: readonly ProfileElement[], from_mm = 0): P
   for (const element of profile) pieces.push(pieceFrom(pieces[pieces.length - 1]?.end ?? at(from_mm, 0), element));
   return pieces;
 }
+
+/** Everything a piece of a profile is drawn with, in mm: a fillet's step does not count, but the profile reaches as far as it. */
+export const drawnStrokes = ({ strokes, uncounted }: ProfilePiece): readonly Stroke[] =>
+  uncounted ? [...strokes, uncounted] : strokes;

@@ -1,5 +1,5 @@
 import { strokeLength, strokeMoment, strokeReach } from '#shared/geometry/stroke';
-import type { ProfilePiece } from '#shared/measure/profile-curve';
+import { drawnStrokes, type ProfilePiece } from '#shared/measure/profile-curve';
 
 /** Girth of one element of a profile in mm, and its first moment about x = 0 in mm² (girth × distance of its centroid). */
 export interface ElementGirth {
@@ -31,7 +31,10 @@ const elementGirth = ({ id, element, strokes }: ProfilePiece): ElementGirth => (
 export function profileGirth(pieces: readonly ProfilePiece[]): ProfileGirth {
   const elements = pieces.map(elementGirth);
   const girth_mm = total(elements.map((element) => element.girth_mm));
-  const reach = pieces.flatMap(({ strokes }) => strokes.flatMap(strokeReach)).map(({ x }) => x);
+  const reach = pieces
+    .flatMap(drawnStrokes)
+    .flatMap(strokeReach)
+    .map(({ x }) => x);
   return {
     elements,
     girth_mm,

@@ -4,7 +4,7 @@ import type { DrawingDimension, DrawingPath, DrawingView } from '#shared/measure
 import { boxAround, dimension, madeView } from '#shared/measure/drawing/made-view';
 import { polylineData, spot } from '#shared/measure/drawing/path-data';
 import { placed, strokesData } from '#shared/measure/drawing/stroke-data';
-import { profileCurve, type ProfilePiece } from '#shared/measure/profile-curve';
+import { drawnStrokes, profileCurve, type ProfilePiece } from '#shared/measure/profile-curve';
 import type { ProfileElement } from '#shared/measure/profile-element';
 
 /** Paths of a profile's curve: its elements, and the steps that do not count as hidden lines. */
@@ -23,10 +23,13 @@ const elementHeights = (pieces: readonly ProfilePiece[], right_mm: number): Draw
 /** The section of a moulding's profile, closed behind by hidden lines, with its overall and its elements' dimensions, in mm. */
 export function profileView(profile: readonly ProfileElement[]): DrawingView {
   const pieces = profileCurve(profile);
-  const reach = pieces.flatMap(({ strokes }) => strokes.flatMap(strokeReach)).map((point) => placed(point, 'right'));
+  const reach = pieces
+    .flatMap(drawnStrokes)
+    .flatMap(strokeReach)
+    .map((point) => placed(point, 'right'));
   const { left_mm, top_mm, width_mm, height_mm } = boxAround(reach);
   const [right_mm, bottom_mm] = [left_mm + width_mm, top_mm + height_mm];
-  const start: Point = pieces[0]?.strokes[0].from ?? { x: 0, y: 0 };
+  const start: Point = { x: 0, y: 0 };
   const end: Point = pieces[pieces.length - 1]?.end ?? start;
   const behind = polylineData([
     placed(start, 'right'),

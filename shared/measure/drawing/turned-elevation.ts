@@ -4,7 +4,7 @@ import { boxAround, dimension, madeView } from '#shared/measure/drawing/made-vie
 import { polylineData, spot } from '#shared/measure/drawing/path-data';
 import { placed, strokesData } from '#shared/measure/drawing/stroke-data';
 import { axis } from '#shared/measure/drawing/upright-figure';
-import { profileCurve, type ProfilePiece } from '#shared/measure/profile-curve';
+import { drawnStrokes, profileCurve, type ProfilePiece } from '#shared/measure/profile-curve';
 import type { TurnedShape } from '#shared/measure/turned-shape';
 
 const level = (radius_mm: number, up_mm: number): DrawingPath => ({
@@ -24,7 +24,7 @@ const piecePaths = ({ strokes, uncounted, end }: ProfilePiece): DrawingPath[] =>
 /** The elevation of a turned piece with its height and its greatest and end diameters, in mm. */
 export function turnedElevation({ profile, radius_mm }: TurnedShape): DrawingView {
   const pieces = profileCurve(profile, radius_mm);
-  const right = pieces.flatMap(({ strokes }) => strokes.flatMap(strokeReach));
+  const right = pieces.flatMap(drawnStrokes).flatMap(strokeReach);
   const reach = right.flatMap((point) => [placed(point, 'right'), placed(point, 'left')]);
   const { left_mm, top_mm, width_mm, height_mm } = boxAround(reach);
   const bottom_mm = top_mm + height_mm;
