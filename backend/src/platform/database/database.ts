@@ -1,6 +1,6 @@
 import * as mariadb from 'mariadb';
 import { QueryTypes, Sequelize, type ModelAttributes, type ModelStatic } from 'sequelize';
-import { Model } from 'sequelize';
+import type { Model } from 'sequelize';
 import { repeatAfterDeadlock } from './retry';
 import { repairSequelize } from './sequelize-fixes';
 import { isInTransaction } from './transaction-context';

@@ -4,8 +4,8 @@ interface DriverRows extends Array<unknown> {
   meta?: unknown;
 }
 interface QueryPrototype {
-  formatResults(data: unknown): unknown;
-  isRawQuery(): boolean;
+  formatResults: (this: QueryPrototype, data: unknown) => unknown;
+  isRawQuery: () => boolean;
   repaired?: true;
 }
 interface Dialect {

@@ -72,30 +72,41 @@ export class Sessions {
   control(request: Request): SessionControl {
     const signIn = (identity: Identity) => this.signIn(request, identity);
     return {
-      id: request.session.passport?.user ? request.session.handle : undefined,
+      get id() {
+        return request.session.passport?.user ? request.session.handle : undefined;
+      },
       get forgeryToken() {
         beginSession(request);
         return request.session.forgeryToken ?? '';
       },
       signIn,
       signInByPassword: () => this.byPassword(request, signIn),
-      signOut: () =>
-        new Promise((resolve, reject) =>
-          request.session.destroy((error) => (error ? reject(error as Error) : resolve())),
-        ),
+      signOut: () => this.signOut(request),
     };
   }
 
   private signIn(request: Request, identity: Identity): Promise<void> {
     return new Promise((resolve, reject) => {
-      request.logIn(identity as Express.User, (error) => (error ? reject(error as Error) : resolve()));
+      request.logIn(identity, (error) => (error ? reject(error as Error) : resolve()));
+    });
+  }
+
+  private signOut(request: Request): Promise<void> {
+    request.res?.clearCookie(cookieName(this.config), {
+      path: '/',
+      httpOnly: true,
+      sameSite: 'lax',
+      secure: isPublic(this.config),
+    });
+    return new Promise((resolve, reject) => {
+      request.session.destroy((error) => (error ? reject(error as Error) : resolve()));
     });
   }
 
   private byPassword(request: Request, signIn: (identity: Identity) => Promise<void>): Promise<Identity | undefined> {
     return new Promise((resolve, reject) => {
-      const decide = (error: unknown, identity: Identity | false): void => {
-        if (error) return reject(error as Error);
+      const decide = (error: Error | null, identity: Identity | false): void => {
+        if (error) return reject(error);
         if (!identity) return resolve(undefined);
         signIn(identity).then(() => resolve(identity), reject);
       };

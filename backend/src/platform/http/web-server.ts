@@ -3,16 +3,19 @@ import express, { type Express, type RequestHandler } from 'express';
 import { SessionStore } from '../session/session-store';
 import type { Identities } from '../session/session-control';
 import type { Platform } from '../platform';
+import type { MailCatcher } from '../mail/mail-catcher';
 import { apiRouter } from './api-router';
+import { caughtMails } from './caught-mails';
 import { forgeryCheck } from './forgery';
 import { safetyHeaders } from './headers';
 import { IdempotencyKeys } from './idempotency';
 import type { Route } from './mount';
 import { problemHandler } from './problem';
 import { Readiness } from './readiness';
+import { reference } from './reference';
 import { requestLimits } from './request-limits';
 import { requestLog } from './request-log';
-import { Sessions, signedInOf } from './sessions';
+import { Sessions, cookieName, signedInOf } from './sessions';
 import { webPages } from './web-pages';
 import { Rejection } from '#shared/problems/rejection';
 
@@ -21,6 +24,8 @@ export interface WebParts {
   readonly routes: readonly Route[];
   readonly identities: Identities;
   readonly isPage: (path: string) => boolean;
+  /** Catches mail where there is no mail server; its page is for the machine's own user. */
+  readonly catcher: MailCatcher | undefined;
 }
 
 export interface WebServer {
@@ -63,7 +68,14 @@ export function openWebServer(platform: Platform, parts: WebParts): WebServer {
   app.get('/healthz', readiness.alive).get('/readyz', readiness.ready);
   app.use(compression());
   app.use('/api', neverKept, sessions.middleware(), named, requestLimits(config), forgeryCheck(config));
+  app.use(
+    reference(
+      parts.routes.map(({ endpoint }) => endpoint),
+      cookieName(config),
+    ),
+  );
   app.use(apiRouter(parts.routes, { database, sessions, keys }));
+  if (parts.catcher && !config.publicUrl) app.get('/development/mail', caughtMails(parts.catcher));
   app.use(webPages(config.webFolder, parts.isPage), notHere, problemHandler(log));
   const sweep = async () => void (await Promise.all([store.sweep(), keys.sweep()]));
   return { express: app, readiness, sweep };

@@ -47,7 +47,7 @@ export class Tasks {
 
   /** Says who does the work of a kind; a handler may run twice, so it must not mind. */
   register<Content>(kind: string, handler: TaskHandler<Content>): void {
-    this.handlers.set(kind, handler as TaskHandler<never>);
+    this.handlers.set(kind, handler);
   }
 
   async add(task: NewTask): Promise<string> {

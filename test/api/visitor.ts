@@ -1,0 +1,57 @@
+import type { Express } from 'express';
+import request, { type Response, type Test } from 'supertest';
+import { signIn, readSession } from '#shared/accounts/session-endpoints';
+import type { Endpoint } from '#shared/actor/endpoint';
+
+/** What one call brings along; everything is optional so that a test may leave it out. */
+export interface Parts {
+  readonly params?: Record<string, string>;
+  readonly query?: Record<string, string | number>;
+  readonly body?: unknown;
+  readonly version?: number;
+  readonly key?: string;
+  readonly file?: { readonly name: string; readonly bytes: Buffer };
+}
+
+/** Somebody with a browser: keeps the cookie, sends the token. */
+export class Visitor {
+  readonly agent: ReturnType<typeof request.agent>;
+  token = '';
+
+  constructor(
+    express: Express,
+    private readonly headers: Readonly<Record<string, string>> = {},
+  ) {
+    this.agent = request.agent(express);
+  }
+
+  /** Asks for the session, as the page does first of all. */
+  async arrive(): Promise<this> {
+    const { body } = (await this.agent.get(readSession.path).set(this.headers)) as { body: { token: string } };
+    this.token = body.token;
+    return this;
+  }
+
+  async signIn(email: string, password: string): Promise<Response> {
+    if (this.token === '') await this.arrive();
+    const response = await this.call(signIn, { body: { email, password } });
+    const { token } = response.body as { token?: string };
+    if (token) this.token = token;
+    return response;
+  }
+
+  /** Calls an endpoint as the page would. */
+  call(endpoint: Endpoint, parts: Parts = {}): Test {
+    const path = endpoint.path.replace(/:(\w+)/g, (_, name: string) =>
+      encodeURIComponent(parts.params?.[name] ?? 'missing'),
+    );
+    const test = this.agent[endpoint.method](path)
+      .set(this.headers)
+      .query(parts.query ?? {});
+    if (endpoint.method !== 'get') test.set('x-csrf-token', this.token);
+    if (parts.version !== undefined) test.set('if-match', `"${parts.version}"`);
+    if (parts.key !== undefined) test.set('idempotency-key', parts.key);
+    if (endpoint.upload && parts.file) return test.attach(endpoint.upload, parts.file.bytes, parts.file.name);
+    return parts.body === undefined ? test : test.send(parts.body as object);
+  }
+}

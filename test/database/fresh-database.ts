@@ -1,0 +1,20 @@
+import { Database } from '../../backend/src/platform/database/database';
+import { migrate } from '../../backend/src/platform/database/migrate';
+import { migrations } from '../../backend/migrations';
+
+const server = (): string => {
+  const url = process.env['TEST_DATABASE_SERVER'];
+  if (!url) throw new Error('no test database is running: run this through jest');
+  return url;
+};
+
+/** An empty database of this Jest worker's own, brought up to date; answers its address. */
+export async function freshDatabase(): Promise<string> {
+  const name = `test_${process.env['JEST_WORKER_ID'] ?? '0'}`;
+  const root = new Database(`${server()}/mysql`, 1);
+  await root.sequelize.query(`DROP DATABASE IF EXISTS ${name}`);
+  await root.sequelize.query(`CREATE DATABASE ${name}`);
+  await root.close();
+  await migrate(`${server()}/${name}`, migrations);
+  return `${server()}/${name}`;
+}
