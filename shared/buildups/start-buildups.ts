@@ -124,8 +124,8 @@ const onSize: readonly BuildUp[] = [
 ];
 
 /** Silver is sealed the day it is burnished, or 2 to 5 days after laying on oil (Eytzinger). */
-const silverSeals: readonly BuildUpStep[] = [
-  seal('seal-first', { name: 'Seal at once' }),
+const silverFirstSeal = seal('seal-first', { name: 'Seal at once' });
+const silverToned: readonly BuildUpStep[] = [
   { ...tone, name: 'Tone or gold varnish' },
   seal('seal-last', { name: 'Seal' }),
 ];
@@ -142,8 +142,9 @@ const otherMetals: readonly BuildUp[] = [
       ...waterGround(3),
       ...laidInWater('burnish'),
       burnish('all', { window_minutes: 8 * hour, missed: 'tarnished' }),
+      silverFirstSeal,
       protectEdge,
-      ...silverSeals,
+      ...silverToned,
     ],
   ),
   buildUp(
@@ -153,7 +154,7 @@ const otherMetals: readonly BuildUp[] = [
       system: 'oil',
       note: 'Sealed 2 to 5 days after laying.',
     },
-    [...oilGround, ...laidOnSize(sizeKinds.threeHour, 'seal-last'), leave(3 * day), ...silverSeals],
+    [...oilGround, ...laidOnSize(sizeKinds.threeHour, 'seal-last'), leave(3 * day), silverFirstSeal, ...silverToned],
   ),
   buildUp(
     {
