@@ -112,7 +112,7 @@ export function estimateFigures(prepared: PreparedEstimate, risk: Risk | null): 
   const { deposit_percent, parts, retention_percent } = draft.settings.stages;
   const stages_percent = parts.length > 0 ? parts.map((part) => part.percent) : [100];
   return {
-    ...workFigures(work, input.card),
+    ...workFigures(work, draft.settings, input.card),
     price: price.client,
     stages: stagePayments(price.client.gross_minor, { deposit_percent, stages_percent, retention_percent }),
     cost: costFigures(work, price, risk),

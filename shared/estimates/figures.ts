@@ -1,8 +1,8 @@
 import type { MaterialBought } from '#shared/buildups/materials-bought';
-import type { LotWork } from '#shared/buildups/lot-works';
 import type { StripLayer } from '#shared/buildups/section-strip';
 import type { StepHours } from '#shared/buildups/step-hours';
 import type { CarvingResult, UseHours } from '#shared/carving/carving-result';
+import type { DryFigures } from '#shared/estimates/dry-figures';
 import type { PriceCost, PriceLines } from '#shared/estimates/price/price';
 import type { Risk } from '#shared/estimates/risk/risk';
 import type { LaysOption } from '#shared/leaf/lays-laying';
@@ -100,6 +100,8 @@ export interface Tally {
   readonly booklets: number;
   readonly booklets_p10: number;
   readonly booklets_p90: number;
+  readonly workingDays: number;
+  readonly weeks: number;
 }
 
 /** What the bench may see: no price, no cost, no rate. */
@@ -113,7 +115,7 @@ export interface WorkFigures {
   readonly grades: readonly GradeFigures[];
   readonly leaf: readonly LeafFigures[];
   readonly materials: readonly Omit<MaterialBought, 'cost' | 'findings' | 'packs'>[];
-  readonly lots: readonly LotWork[];
+  readonly dry: DryFigures;
   readonly findings: readonly Finding[];
 }
 

@@ -1,6 +1,7 @@
 import { groundThickness } from '#shared/buildups/ground-thickness';
 import { sectionStrip } from '#shared/buildups/section-strip';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
+import { dryFigures } from '#shared/estimates/dry-figures';
 import type { EstimateWork } from '#shared/estimates/estimate-work';
 import type {
   GradeFigures,
@@ -13,6 +14,7 @@ import type {
   ZoneLeafFigures,
 } from '#shared/estimates/figures';
 import type { MeasuredMember } from '#shared/estimates/measured-member';
+import type { EstimateSettings } from '#shared/estimates/settings';
 import type { WorkedZone } from '#shared/estimates/worked-zone';
 import { bookletsFor } from '#shared/leaf/booklets-for';
 import type { LeafProduct } from '#shared/leaf/leaf-product';
@@ -138,7 +140,9 @@ function bookletsAt(
   );
 }
 
-const tallyOf = (work: EstimateWork, card: RateCard, members: readonly MemberFigures[]): Tally => ({
+type TallyOfWork = Omit<Tally, 'workingDays' | 'weeks'>;
+
+const tallyOf = (work: EstimateWork, card: RateCard, members: readonly MemberFigures[]): TallyOfWork => ({
   members: sum(work.members.map(({ member }) => member.count)),
   true_mm2: sum(members.map((member) => member.true_mm2)),
   carving_hours: work.carving.total,
@@ -149,12 +153,13 @@ const tallyOf = (work: EstimateWork, card: RateCard, members: readonly MemberFig
 });
 
 /** The figures of an estimate's work, without a word of money: areas mm², hours decimal, leaves not rounded, booklets whole. */
-export function workFigures(work: EstimateWork, card: RateCard): WorkFigures {
+export function workFigures(work: EstimateWork, settings: EstimateSettings, card: RateCard): WorkFigures {
+  const { dry, findings } = dryFigures(work, settings, card);
   const members = work.members.map((measured) => memberFigures(measured, work, card));
   const { rows, total, sharpening, patterns, reasons } = work.carving;
   return {
     calculatorVersion,
-    tally: tallyOf(work, card, members),
+    tally: { ...tallyOf(work, card, members), workingDays: dry.elapsed_workingDays, weeks: dry.elapsed_weeks },
     members,
     zones: work.zones.map((zone) => zoneFigures(zone, card)),
     uses: useFigures(work, card),
@@ -164,7 +169,7 @@ export function workFigures(work: EstimateWork, card: RateCard): WorkFigures {
     materials: work.materials.map(({ materialId, name, unit, need, bought, reasons: because }) => ({
       ...{ materialId, name, unit, need, bought, reasons: because },
     })),
-    lots: work.lots,
-    findings: work.findings,
+    dry,
+    findings: [...work.findings, ...findings],
   };
 }

@@ -366,7 +366,7 @@ describe('laws of the price', () => {
         fc.pre(input.contingency.way === 'share' && input.extras.some((line) => line.kind === 'insurance'));
         const { client, cost } = priceOf(input);
         const insurance = cost.heads.find((head) => head.head === 'insurance')?.cost_minor ?? 0;
-        expect(Math.abs(insurance - client.subtotal_minor * 0.004)).toBeLessThanOrEqual(1.01);
+        expect(Math.abs(insurance * 250 - client.subtotal_minor)).toBeLessThanOrEqual(253);
       }),
     );
   });

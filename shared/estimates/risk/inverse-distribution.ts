@@ -14,7 +14,8 @@ function pert({ low, likely, high }: Triple): InverseDistribution {
 
 /** The inverse of the distribution of a triple, triangular in closed form or PERT by table; a triple of one point is that point. */
 export function inverseDistribution(triple: Triple, shape: 'triangular' | 'pert'): InverseDistribution {
-  if (!(triple.low <= triple.likely && triple.likely <= triple.high)) throw new RangeError('a triple must rise from low to high');
+  if (!(triple.low <= triple.likely && triple.likely <= triple.high))
+    throw new RangeError('a triple must rise from low to high');
   if (triple.high === triple.low) return () => triple.likely;
   return shape === 'pert' ? pert(triple) : (share) => triangularPercentile(triple, share);
 }

@@ -7,7 +7,9 @@ const entriesPerUnit = 128;
 function errorFunction(x: number): number {
   const inner =
     1 +
-    x * (0.0705230784 + x * (0.0422820123 + x * (0.0092705272 + x * (0.0001520143 + x * (0.0002765672 + x * 0.0000430638)))));
+    x *
+      (0.0705230784 +
+        x * (0.0422820123 + x * (0.0092705272 + x * (0.0001520143 + x * (0.0002765672 + x * 0.0000430638)))));
   const squared = inner * inner;
   const fourth = squared * squared;
   const eighth = fourth * fourth;

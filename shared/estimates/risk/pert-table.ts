@@ -7,18 +7,16 @@ import { type QuantileTable, quantileTable } from '#shared/estimates/risk/quanti
  *
  * The table stands on y with x = y²(3 − 2y), which flattens the density at both ends, and Simpson's rule sums every cell.
  */
-const cells = 512;
+const cells = 1024;
 const points = 2 * cells + 1;
 const binaryDigits = 24;
 
-const placeAt = (point: number): number => {
-  const y = point / (points - 1);
-  return y * y * (3 - 2 * y);
-};
+/** The place from 0 to 1 that an entry y of a PERT table stands for. */
+export const pertPlace = (y: number): number => y * y * (3 - 2 * y);
 
 /** roots[k][point] = x^(1 / 2^k); made once. */
 function rootTable(): Float64Array[] {
-  const roots = [Float64Array.from({ length: points }, (_, point) => placeAt(point))];
+  const roots = [Float64Array.from({ length: points }, (_, point) => pertPlace(point / (points - 1)))];
   for (let digit = 1; digit <= binaryDigits; digit += 1) roots.push(roots[digit - 1].map((root) => Math.sqrt(root)));
   return roots;
 }
@@ -28,14 +26,16 @@ let knownRoots: Float64Array[] | undefined;
 /** x^exponent at every point, exponent 0…4 taken to 24 binary digits. */
 function powers(exponent: number): Float64Array {
   const roots = (knownRoots ??= rootTable());
-  const powers = new Float64Array(points).fill(1);
+  const result = new Float64Array(points).fill(1);
   let rest = exponent;
-  for (let digit = 0; digit <= binaryDigits && rest > 0; digit += 1) {
-    for (const size = 1 / 2 ** digit; rest >= size; rest -= size) {
-      for (let point = 0; point < points; point += 1) powers[point] *= roots[digit][point];
+  let size = 1;
+  for (const root of roots) {
+    for (; rest >= size; rest -= size) {
+      for (let point = 0; point < points; point += 1) result[point] *= root[point];
     }
+    size /= 2;
   }
-  return powers;
+  return result;
 }
 
 /** Density at every point, times dx/dy, of any scale. */
@@ -58,6 +58,3 @@ export function pertTable(mode: number): QuantileTable {
   }
   return quantileTable(0, 1 / cells, sums);
 }
-
-/** The place from 0 to 1 that an entry y of a PERT table stands for. */
-export const pertPlace = (y: number): number => y * y * (3 - 2 * y);

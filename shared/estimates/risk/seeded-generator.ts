@@ -20,7 +20,8 @@ function splitmix32(seed: number): Generator32 {
  * from 0 to 2^32 − 1; RangeError unless the state is four words, not all zero.
  */
 export function xoshiro128StarStar(state: readonly number[]): Generator32 {
-  if (state.length !== 4 || state.every((word) => (word | 0) === 0)) throw new RangeError('the state is four words, not all zero');
+  if (state.length !== 4 || state.every((word) => (word | 0) === 0))
+    throw new RangeError('the state is four words, not all zero');
   let [a, b, c, d] = state;
   return () => {
     const result = Math.imul(rotatedLeft(Math.imul(b, 5), 7), 9) >>> 0;

@@ -1,0 +1,61 @@
+import { v7 as newId } from 'uuid';
+import type { RateCard } from '#shared/rate-cards/rate-card';
+import { startCard } from '#shared/rate-cards/start-card';
+import { dayOfInstant } from '#shared/calendar/day-of-instant';
+import { Rejection } from '#shared/problems/rejection';
+import type { WorkshopService } from '../accounts';
+import type { AuditService, Doer } from '../audit';
+import type { Clock } from '../platform/clock/clock';
+import type { RateCardRow } from './rate-card-model';
+import type { RateCardRepository } from './rate-card-repository';
+
+interface Parts {
+  readonly cards: RateCardRepository;
+  readonly workshops: WorkshopService;
+  readonly audit: AuditService;
+  readonly clock: Clock;
+}
+
+/** The first of all days: the start card is in force from the beginning. */
+const beginning = '1970-01-01';
+
+/** Rate cards: the one in force, and each that ever was. */
+export class RateCardService {
+  constructor(private readonly parts: Parts) {
+    parts.workshops.bringAlong((by) => this.plantStartCard(by));
+  }
+
+  /** The day it is in the workshop. */
+  async today(workshopId: string): Promise<string> {
+    const { timeZone } = await this.parts.workshops.get(workshopId);
+    return dayOfInstant(this.parts.clock.now().getTime(), timeZone);
+  }
+
+  async inForce(workshopId: string): Promise<RateCardRow> {
+    const row = await this.parts.cards.inForce(workshopId, await this.today(workshopId));
+    if (!row) throw new Rejection('conflict', 'rate-card-none-in-force');
+    return row;
+  }
+
+  get(workshopId: string, id: string): Promise<RateCardRow> {
+    return this.parts.cards.get(workshopId, id);
+  }
+
+  async card(workshopId: string, id: string): Promise<RateCard> {
+    return (await this.get(workshopId, id)).content;
+  }
+
+  private async plantStartCard(by: Doer): Promise<void> {
+    const id = newId();
+    await this.parts.cards.insert(by.workshopId, {
+      id,
+      version: 1,
+      name: 'House values to start from',
+      inForceFrom: beginning,
+      basedOnId: null,
+      content: startCard,
+      changedAt: this.parts.clock.now(),
+    });
+    await this.parts.audit.record(by, { subject: { kind: 'rate-card', id }, code: 'audit-rate-card-planted' });
+  }
+}

@@ -1,0 +1,90 @@
+import type { EstimateWork } from '#shared/estimates/estimate-work';
+import type { EstimateSettings } from '#shared/estimates/settings';
+import { jobSequence, type JobSequence, type LotSpan } from '#shared/drying/job-sequence';
+import { lotSequence, type LotSequence } from '#shared/drying/lot-sequence';
+import { endOfWork } from '#shared/drying/working-clock';
+import { workingTime, type WorkingTime } from '#shared/drying/working-time';
+import { countUp } from '#shared/money/settled';
+import type { RateCard } from '#shared/rate-cards/rate-card';
+import type { Finding } from '#shared/words/finding';
+
+/** One stretch of hands-on work of a coat, in elapsed minutes from the start of the job. */
+export interface DryTask {
+  readonly lotId: string;
+  readonly stepId: string;
+  readonly coat: number;
+  readonly portion: number;
+  readonly start_minutes: number;
+  readonly end_minutes: number;
+  readonly handsOn_minutes: number;
+}
+
+/** A lot with its steps and when it is in work. */
+export interface DryLot extends Omit<LotSequence, 'findings' | 'system'>, Omit<LotSpan, 'lotId' | 'handsOn_minutes'> {
+  readonly buildUp: string;
+}
+
+/** Hands-on and waiting time of the job as a sequence by lots; elapsed time, no dates. */
+export interface DryFigures extends Omit<JobSequence, 'tasks' | 'lots' | 'findings'> {
+  readonly lots: readonly DryLot[];
+  readonly tasks: readonly DryTask[];
+  /** Carving before the first lot can be sized, one carver at work. */
+  readonly carving_minutes: number;
+}
+
+/** One carver works through the members in the order of the lots; a lot is ready when all its members are carved. */
+function readyTimes(work: EstimateWork, time: WorkingTime): Record<string, number> {
+  const carved = new Set<string>();
+  let hours = 0;
+  const ready: Record<string, number> = {};
+  for (const lot of work.lots) {
+    for (const zone of work.zones.filter(({ facts }) => lot.zoneIds.includes(facts.id))) {
+      if (carved.has(zone.memberId)) continue;
+      carved.add(zone.memberId);
+      hours += memberCarving(work, zone.memberId);
+    }
+    const clock = countUp((hours * 60 * 100) / time.productiveShare_percent);
+    ready[lot.id] = clock === 0 ? 0 : endOfWork(0, clock, time);
+  }
+  return ready;
+}
+
+const memberCarving = (work: EstimateWork, memberId: string): number =>
+  work.labour
+    .filter((entry) => entry.memberId === memberId && entry.kind === 'carving')
+    .reduce((sum, entry) => sum + entry.hours, 0);
+
+function dryLot(sequence: LotSequence, job: JobSequence, work: EstimateWork): DryLot {
+  const span = job.lots.find((one) => one.lotId === sequence.lotId);
+  const zone = work.zones.find(({ facts }) => facts.buildUpId === sequence.buildUpId);
+  const { lotId, pieceId, buildUpId, steps, handsOn_minutes, drying_minutes } = sequence;
+  return {
+    ...{ lotId, pieceId, buildUpId, steps, handsOn_minutes, drying_minutes },
+    buildUp: zone?.buildUp?.name ?? buildUpId,
+    start_minutes: span?.start_minutes ?? 0,
+    end_minutes: span?.end_minutes ?? 0,
+    waiting_minutes: span?.waiting_minutes ?? 0,
+  };
+}
+
+/** Lays a job's lots into the workshop's week in the shop's air: minutes rounded up, one worker of each grade, holds waited for. */
+export function dryFigures(
+  work: EstimateWork,
+  settings: EstimateSettings,
+  card: RateCard,
+): { dry: DryFigures; findings: Finding[] } {
+  const time = workingTime(card.buildUps, card.drying);
+  const sequences = work.lots.map((lot) => lotSequence(lot, settings.shop, card));
+  const ready_minutes = readyTimes(work, time);
+  const job = jobSequence({ lots: sequences, ready_minutes, holds_days: card.drying.holds_days, time });
+  const { elapsed_minutes, elapsed_workingDays, elapsed_weeks } = job;
+  const dry = {
+    ...{ elapsed_minutes, elapsed_workingDays, elapsed_weeks },
+    carving_minutes: Math.max(0, ...Object.values(ready_minutes)),
+    lots: sequences.map((sequence) => dryLot(sequence, job, work)),
+    tasks: job.tasks.map(({ lotId, step, coat, portion, start_minutes, end_minutes, handsOn_minutes }) => ({
+      ...{ lotId, stepId: step.stepId, coat, portion, start_minutes, end_minutes, handsOn_minutes },
+    })),
+  };
+  return { dry, findings: [...sequences.flatMap((sequence) => sequence.findings), ...job.findings] };
+}
