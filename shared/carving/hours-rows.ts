@@ -6,7 +6,7 @@ const together = <Row extends { readonly hours: Triple }>(rows: readonly Row[], 
   const groups = new Map<string, Row[]>();
   for (const row of rows) groups.set(keyOf(row), [...(groups.get(keyOf(row)) ?? []), row]);
   return [...groups.values()].map((group) => ({
-    ...(group[0]),
+    ...group[0],
     hours: tripleSum(group.map((row) => row.hours)),
   }));
 };

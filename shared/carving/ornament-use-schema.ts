@@ -8,8 +8,8 @@ import { count, identifier } from '#shared/problems/entry-schema';
 
 const length_mm = z.number().min(0).max(1e6);
 
-const halfRunsFit = (run: Extract<OrnamentExtent, { way: 'run' }>): boolean =>
-  run.mitreLeaf_mm * run.mitreLeaves + (run.centre_mm ?? 0) <= run.run_mm;
+const leavesRoom = (run: Extract<OrnamentExtent, { way: 'run' }>): boolean =>
+  run.run_mm < 0 || run.mitreLeaf_mm * run.mitreLeaves + (run.centre_mm ?? 0) <= run.run_mm;
 
 /** How much of an ornament a member carries; mitre leaves and centrepiece must leave the run at least its length. */
 export const ornamentExtentSchema = z.discriminatedUnion('way', [
@@ -23,7 +23,7 @@ export const ornamentExtentSchema = z.discriminatedUnion('way', [
       mitreLeaves: z.int().min(0).max(100),
       centre_mm: length_mm.nullable(),
     })
-    .refine(halfRunsFit, { ...complain('carving-run-taken'), path: ['run_mm'] }),
+    .refine(leavesRoom, { ...complain('carving-run-taken'), path: ['run_mm'] }),
   z.strictObject({ way: z.literal('area'), area_mm2: z.number().min(0).max(1e10) }),
 ]);
 

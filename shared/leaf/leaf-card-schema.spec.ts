@@ -33,7 +33,7 @@ describe('leafCardSchema', () => {
           { booklets: 20, off_percent: '6' },
         ],
       },
-      ['breaks.1.booklets leaf-break-order'],
+      ['breaks.1.booklets leaf-pack-twice'],
     ],
     ['nothing else is taken', { colour: 'red' }, ['colour entry-unknown']],
   ])('%s', (_sentence, changed, expected) => {

@@ -25,7 +25,7 @@ const breakSchema = z.strictObject({ booklets: z.int().min(2).max(10_000), off_p
 function packsOnce(breaks: readonly LeafBreak[], context: z.core.$RefinementCtx): void {
   breaks.forEach((offer, at) => {
     if (breaks.findIndex((other) => other.booklets === offer.booklets) < at) {
-      complainAt(context, [at, 'booklets'], complain('leaf-break-order'));
+      complainAt(context, [at, 'booklets'], complain('leaf-pack-twice'));
     }
   });
 }

@@ -52,5 +52,5 @@ export const leaf = {
   'leaf-alloy-empty': 'Say what the leaf is made of.',
   'leaf-ribbon-length': 'Say how long a roll of ribbon is.',
   'leaf-no-ribbon': 'Only ribbon has a length; leave this empty for leaves.',
-  'leaf-break-order': 'Give each pack size once.',
+  'leaf-pack-twice': 'Give each pack size once.',
 } as const;
