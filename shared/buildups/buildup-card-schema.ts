@@ -10,7 +10,7 @@ import {
   figure,
   itemList,
   percentEntry,
-} from '#shared/buildups/card-entry-schema';
+} from '#shared/problems/card-entry-schema';
 import { materialSchema, recipeSchema } from '#shared/buildups/material-schema';
 import { stepSchema } from '#shared/buildups/step-schema';
 import { complain } from '#shared/problems/complaints-of';

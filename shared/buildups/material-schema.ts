@@ -6,7 +6,7 @@ import {
   decimalEntry,
   itemList,
   positiveDecimalEntry,
-} from '#shared/buildups/card-entry-schema';
+} from '#shared/problems/card-entry-schema';
 import { complain } from '#shared/problems/complaints-of';
 
 const packSchema = z.strictObject({ id: cardItemId, size: positiveDecimalEntry, price: decimalEntry });

@@ -8,7 +8,7 @@ import {
   stepKinds,
   type BuildUpStep,
 } from '#shared/buildups/buildup';
-import { cardItemId, cardItemName, cardNote, factorEntry, figure, lossEntry } from '#shared/buildups/card-entry-schema';
+import { cardItemId, cardItemName, cardNote, factorEntry, figure, lossEntry } from '#shared/problems/card-entry-schema';
 import { complain } from '#shared/problems/complaints-of';
 import { tripleEntry } from '#shared/units/triple-schema';
 

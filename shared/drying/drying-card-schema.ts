@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { complainAt, factorEntry } from '#shared/buildups/card-entry-schema';
+import { complainAt, factorEntry } from '#shared/problems/card-entry-schema';
 import type { DryingCard, HumidityPoint } from '#shared/drying/drying-card';
 import { complain } from '#shared/problems/complaints-of';
 

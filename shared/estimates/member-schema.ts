@@ -8,7 +8,7 @@ import { zoneTakeSchema } from '#shared/measure/zone-take-schema';
 import { recuttingManners } from '#shared/carving/carving-card';
 import { layingWays } from '#shared/leaf/leaf-card';
 import { complain } from '#shared/problems/complaints-of';
-import { cardItemId, percentEntry } from '#shared/buildups/card-entry-schema';
+import { cardItemId, percentEntry } from '#shared/problems/card-entry-schema';
 import { count, identifier, line, optionalLine, paragraphs } from '#shared/problems/entry-schema';
 
 const few = <S extends z.ZodType>(item: S, maximum: number) => z.array(item).max(maximum);

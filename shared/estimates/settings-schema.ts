@@ -1,7 +1,7 @@
 import * as z from 'zod';
 import type { EstimateSettings, ExtraLine } from '#shared/estimates/settings';
 import { complain } from '#shared/problems/complaints-of';
-import { cardItemId, decimalEntry, percentEntry } from '#shared/buildups/card-entry-schema';
+import { cardItemId, decimalEntry, percentEntry } from '#shared/problems/card-entry-schema';
 import { identifier, line, optionalLine, paragraphs } from '#shared/problems/entry-schema';
 
 export const climateSchema = z.strictObject({

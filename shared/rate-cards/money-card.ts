@@ -41,7 +41,12 @@ export interface Profit {
 
 /** What a job needs besides carving and gilding. Hours decimal, prices in the workshop's currency. */
 export interface Extras {
-  readonly sampleBoard: { readonly hours: number; readonly gradeId: string; readonly booklets: number };
+  readonly sampleBoard: {
+    readonly hours: number;
+    readonly gradeId: string;
+    readonly booklets: number;
+    readonly leafProductId: string;
+  };
   readonly packing: { readonly hours: number; readonly gradeId: string; readonly crate: DecimalText };
   readonly fitting: { readonly people: number; readonly hours: number; readonly gradeId: string };
   readonly touchingIn: { readonly hours: number; readonly gradeId: string };
@@ -64,7 +69,7 @@ export interface Making {
   readonly turningGradeId: string;
 }
 
-/** One stage of the default plan of payment, as a share of the contract. */
+/** One stage of the default plan of payment, in percent of the contract. */
 export interface PaymentStage {
   readonly id: string;
   readonly name: string;
