@@ -29,7 +29,6 @@ const head = {
   /** Raised with every change of anything in it. */
   version,
   rateCardId: identifier,
-  rateCardIsInForce: z.boolean(),
   currency: z.string(),
   pieces,
   members,
@@ -78,4 +77,4 @@ export const keptChangesSchema = z.strictObject({
 export type KeptChanges = z.infer<typeof keptChangesSchema>;
 
 /** Who else is at work on the estimate, and its version, so that a page knows when to read it again. */
-export const presenceSchema = z.strictObject({ version, others: z.array(z.string()) });
+export const presenceSchema = z.strictObject({ version, others: z.array(z.string()), rateCardInForceId: identifier });

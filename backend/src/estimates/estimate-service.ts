@@ -1,0 +1,158 @@
+import { randomInt } from 'node:crypto';
+import { v7 as newId } from 'uuid';
+import type { Actor } from '#shared/actor/actor';
+import { audienceOf } from '#shared/actor/role';
+import type { Change } from '#shared/estimates/change-schema';
+import type { CostedEstimate, KeptChanges } from '#shared/estimates/estimate-schema';
+import type { Figures } from '#shared/estimates/figures';
+import { startSettings } from '#shared/estimates/start-settings';
+import { Rejection } from '#shared/problems/rejection';
+import type { WorkshopService } from '../accounts';
+import type { AuditService } from '../audit';
+import type { JobService } from '../jobs';
+import type { Clock } from '../platform/clock/clock';
+import type { PreparedAnswer } from '../platform/http/answer';
+import type { RateCardService } from '../rate-cards';
+import { changePlan } from './change-plan';
+import type { ChangeService } from './change-service';
+import type { MemberContentRow, PieceContentRow } from './content-model';
+import type { ContentRepository } from './content-repository';
+import type { EstimateRow } from './estimate-model';
+import { presentEstimate } from './estimate-presenter';
+import type { EstimateRepository } from './estimate-repository';
+import type { ReadingService } from './reading-service';
+import { workedEstimate, type WholeEstimate } from './worked-estimate';
+
+export interface EstimateParts {
+  readonly estimates: EstimateRepository;
+  readonly pieces: ContentRepository<PieceContentRow>;
+  readonly members: ContentRepository<MemberContentRow>;
+  readonly readings: ReadingService;
+  readonly changes: ChangeService;
+  readonly cards: RateCardService;
+  readonly jobs: JobService;
+  readonly workshops: WorkshopService;
+  readonly audit: AuditService;
+  readonly clock: Clock;
+}
+
+/** Drafts of estimates: beginning, reading and changing them, and the card they are worked on. */
+export class EstimateService {
+  constructor(private readonly parts: EstimateParts) {}
+
+  async ofJob(workshopId: string, jobId: string): Promise<EstimateRow[]> {
+    await this.parts.jobs.get(workshopId, jobId);
+    return this.parts.estimates.ofJob(workshopId, jobId);
+  }
+
+  /** Begins an estimate on the card in force; the same id again finds what was begun. */
+  async begin(actor: Actor, at: { jobId: string; id: string }, title: string): Promise<EstimateRow> {
+    const { workshopId } = actor;
+    const job = await this.parts.jobs.lock(workshopId, at.jobId);
+    const known = await this.parts.estimates.find(workshopId, at.id);
+    if (known) return this.sameJob(known, at.jobId);
+    const card = await this.parts.cards.inForce(workshopId);
+    const { currency } = await this.parts.workshops.get(workshopId);
+    const earlier = await this.parts.estimates.ofJob(workshopId, at.jobId);
+    const stageIds = card.content.money.terms.stages.map(() => newId());
+    const start = { title, seed: randomInt(1, 2 ** 32 - 1), restoration: job.kind === 'restoration', stageIds };
+    const row = await this.parts.estimates.insert(workshopId, {
+      id: at.id,
+      jobId: at.jobId,
+      number: `${job.number}-${earlier.length + 1}`,
+      version: 1,
+      rateCardId: card.id,
+      currency,
+      settings: startSettings(card.content, start),
+      settingsVersion: 1,
+      members: 0,
+      letter: null,
+      changedAt: this.parts.clock.now(),
+    });
+    const subject = { kind: 'estimate', id: row.id };
+    await this.parts.audit.record(actor, {
+      subject,
+      jobId: row.jobId,
+      code: 'audit-estimate-begun',
+      values: { number: row.number },
+    });
+    await this.refresh(workshopId, row.id);
+    return row;
+  }
+
+  /** Everything in an estimate, in three queries whatever its size. */
+  async whole(workshopId: string, id: string): Promise<WholeEstimate> {
+    const estimate = await this.parts.estimates.get(workshopId, id);
+    const pieces = await this.parts.pieces.ofEstimate(workshopId, id);
+    return { estimate, pieces, members: await this.parts.members.ofEstimate(workshopId, id) };
+  }
+
+  async read(actor: Actor, id: string): Promise<PreparedAnswer | ReturnType<typeof presentEstimate>> {
+    const audience = audienceOf(actor.roles);
+    const kept = await this.parts.readings.find(actor.workshopId, id, audience);
+    if (kept) return kept;
+    const whole = await this.whole(actor.workshopId, id);
+    return presentEstimate(whole, await this.figures(whole), audience);
+  }
+
+  async figures(whole: WholeEstimate): Promise<Figures> {
+    return workedEstimate(whole, await this.parts.cards.card(whole.estimate.workshopId, whole.estimate.rateCardId));
+  }
+
+  /** Keeps a list of changes, all or nothing, and answers the figures of record. */
+  async change(actor: Actor, id: string, changes: readonly Change[]): Promise<KeptChanges> {
+    const { workshopId } = actor;
+    await this.parts.estimates.lock(workshopId, id);
+    const plan = changePlan(changes, await this.whole(workshopId, id));
+    const { estimate } = await this.whole(workshopId, id);
+    await this.parts.changes.apply(actor, estimate, plan);
+    const settings = plan.find(({ change }) => change.kind === 'settings');
+    if (plan.length > 0)
+      await this.raise(estimate, settings?.change.kind === 'settings' ? settings.change.content : null);
+    const { whole, figures } = await this.refresh(workshopId, id);
+    const rows = [...whole.pieces, ...whole.members, { id, version: whole.estimate.settingsVersion }];
+    const versions = rows
+      .filter((row) => changes.some((change) => change.id === row.id))
+      .map((row) => ({ id: row.id, version: row.version }));
+    return { version: whole.estimate.version, versions, figures } as KeptChanges;
+  }
+
+  /** Works the estimate on the card in force from now on. */
+  async takeCard(actor: Actor, at: { id: string; version: number }): Promise<CostedEstimate> {
+    const { workshopId } = actor;
+    const card = await this.parts.cards.inForce(workshopId);
+    const changedAt = this.parts.clock.now();
+    const row = await this.parts.estimates.change(workshopId, at, { rateCardId: card.id, changedAt });
+    const values = { number: row.number, card: card.name };
+    await this.parts.audit.record(actor, {
+      subject: { kind: 'estimate', id: row.id },
+      jobId: row.jobId,
+      code: 'audit-card-taken',
+      values,
+    });
+    const { whole, figures } = await this.refresh(workshopId, at.id);
+    return presentEstimate(whole, figures, 'cost') as CostedEstimate;
+  }
+
+  private async raise(estimate: EstimateRow, settings: EstimateRow['settings'] | null): Promise<void> {
+    const { workshopId, id, version, settingsVersion } = estimate;
+    const changed = settings ? { settings, settingsVersion: settingsVersion + 1 } : {};
+    await this.parts.estimates.change(workshopId, { id, version }, { ...changed, changedAt: this.parts.clock.now() });
+    await this.parts.jobs.touch(workshopId, estimate.jobId);
+  }
+
+  private async refresh(workshopId: string, id: string): Promise<{ whole: WholeEstimate; figures: Figures }> {
+    const read = await this.whole(workshopId, id);
+    const members = read.members.reduce((sum, member) => sum + member.content.count, 0);
+    if (members !== read.estimate.members) await this.parts.estimates.write(workshopId, id, { members });
+    const whole = { ...read, estimate: { ...read.estimate, members } };
+    const figures = await this.figures(whole);
+    await this.parts.readings.keep(whole, figures);
+    return { whole, figures };
+  }
+
+  private sameJob(row: EstimateRow, jobId: string): EstimateRow {
+    if (row.jobId !== jobId) throw new Rejection('not-found', 'problem-not-found');
+    return row;
+  }
+}

@@ -1,0 +1,61 @@
+import type { Choice, Draft } from '#shared/estimates/draft';
+import type { Figures } from '#shared/estimates/figures';
+import type { LengthUnit } from '#shared/units/length-unit';
+import type { RateCard } from '#shared/rate-cards/rate-card';
+
+/** The workshop as it stood over its papers when an issue was made. */
+export interface SnapshotWorkshop {
+  readonly name: string;
+  readonly addressLines: readonly string[];
+  readonly telephone: string;
+  readonly email: string;
+  readonly taxRegistration: string;
+  readonly currency: string;
+  readonly locale: string;
+  readonly lengthUnit: LengthUnit;
+  readonly timeZone: string;
+  readonly paperSize: string;
+  readonly country: string;
+}
+
+/** The client a paper is addressed to. */
+export interface SnapshotClient {
+  readonly name: string;
+  readonly contact: string;
+  readonly address: string;
+}
+
+/** The job a paper speaks of. */
+export interface SnapshotJob {
+  readonly number: string;
+  readonly title: string;
+  readonly reference: string;
+  readonly site: string;
+}
+
+/** What an issue freezes: inputs, rate card, choice, results with their explanation, and which calculator worked them. */
+export interface Snapshot {
+  readonly snapshotVersion: 1;
+  readonly calculatorVersion: number;
+  readonly workshop: SnapshotWorkshop;
+  readonly client: SnapshotClient;
+  readonly job: SnapshotJob;
+  readonly estimate: { readonly id: string; readonly number: string; readonly letter: string };
+  /** Instant in UTC (ISO 8601), and days in the workshop's own zone. */
+  readonly issuedAt: string;
+  readonly issuedOn: string;
+  readonly issuedBy: string;
+  readonly validUntil: string;
+  readonly leafValidUntil: string;
+  readonly note: string;
+  readonly draft: Draft;
+  readonly card: RateCard;
+  readonly choice: Choice;
+  readonly figures: Figures;
+  /** Each alternative by itself against the base: its own total and the difference, gross, in minor units. */
+  readonly alternatives: readonly {
+    readonly id: string;
+    readonly gross_minor: number;
+    readonly difference_minor: number;
+  }[];
+}
