@@ -28,7 +28,8 @@ export class ChooseWorkshopPage {
   private readonly freshPage = inject(FreshPage);
 
   protected readonly who = inject(Session).facts;
-  protected readonly form = schemaForm(foundAnother.body, { name: '', ...proposedHabits(navigator.language) });
+  protected readonly proposed = proposedHabits(navigator.language);
+  protected readonly form = schemaForm(foundAnother.body, { name: '', ...this.proposed });
   protected readonly message = (name: string): string => this.form.message(name);
 
   protected enter(membershipId: string): Promise<void> {

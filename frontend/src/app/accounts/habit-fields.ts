@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { type FormGroup, ReactiveFormsModule } from '@angular/forms';
+import { paperSizes } from '#shared/accounts/workshop-options';
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
 import { countryChoices, currencyChoices, localeChoices, timeZoneChoices } from './habit-choices';
@@ -15,9 +16,12 @@ import { countryChoices, currencyChoices, localeChoices, timeZoneChoices } from 
 export class HabitFields {
   readonly group = input.required<FormGroup>();
   readonly message = input.required<(name: string) => string>();
+  /** The one a workshop has, offered even where it is a rare one. */
+  readonly presentLocale = input('');
 
   protected readonly countries = countryChoices();
   protected readonly currencies = currencyChoices();
   protected readonly timeZones = timeZoneChoices();
-  protected readonly locales = computed(() => localeChoices(String(this.group().getRawValue()['locale'] ?? '')));
+  protected readonly paperSizes = paperSizes;
+  protected readonly locales = computed(() => localeChoices(this.presentLocale()));
 }

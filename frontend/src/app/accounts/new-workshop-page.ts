@@ -21,11 +21,12 @@ import { StrangerFrame } from './stranger-frame';
 export class NewWorkshopPage {
   private readonly api = inject(Api);
 
+  protected readonly proposed = proposedHabits(navigator.language);
   protected readonly sentTo = signal('');
   protected readonly form = schemaForm(askToFound.body, {
     name: '',
     email: '',
-    workshop: { name: '', ...proposedHabits(navigator.language) },
+    workshop: { name: '', ...this.proposed },
   });
   protected readonly habitMessage = (name: string): string => this.form.message(`workshop.${name}`);
 

@@ -1,10 +1,11 @@
-import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { changePassword } from '#shared/accounts/password-endpoints';
 import { Api } from '../core/api/api';
 import { schemaForm } from '../core/forms/schema-form';
 import { Notices } from '../core/problems/notices';
+import { Session } from '../core/session/session';
 import { FormComplaint } from '../ui/field/form-complaint';
 import { PasswordField } from './password-field';
 
@@ -15,6 +16,15 @@ import { PasswordField } from './password-field';
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <form class="fields single" [formGroup]="form.group" (ngSubmit)="send()">
+      <input
+        class="visually-hidden"
+        type="text"
+        autocomplete="username"
+        tabindex="-1"
+        aria-hidden="true"
+        readonly
+        [value]="email()"
+      />
       <app-password-field
         i18n-label
         label="Present password"
@@ -39,8 +49,11 @@ import { PasswordField } from './password-field';
 })
 export class OwnPasswordForm {
   private readonly api = inject(Api);
+  private readonly session = inject(Session);
   private readonly notices = inject(Notices);
 
+  /** Unseen, but a password keeper wants to know whose password this is. */
+  protected readonly email = computed(() => this.session.facts()?.email ?? '');
   protected readonly form = schemaForm(changePassword.body, { current: '', password: '' });
 
   protected async send(): Promise<void> {

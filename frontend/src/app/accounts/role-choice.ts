@@ -35,6 +35,10 @@ import { roleNames } from './role-names';
       font-weight: 500;
     }
 
+    .muted {
+      margin-left: 6px;
+    }
+
     .complaint {
       color: var(--wrong);
     }

@@ -8,7 +8,7 @@ import { Mark } from '../ui/icon/mark';
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <main>
-      <p class="name"><app-mark /> <span>Bolewright</span></p>
+      <p class="name"><app-mark /> <span i18n>Bolewright</span></p>
       <h1>{{ heading() }}</h1>
       @if (about()) {
         <p class="muted">{{ about() }}</p>

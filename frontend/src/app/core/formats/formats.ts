@@ -1,6 +1,7 @@
 import { Injectable, computed, inject } from '@angular/core';
 import { currencyDigits } from '#shared/money/currency-digits';
 import type { MinorUnits } from '#shared/money/decimal';
+import { textOf } from '#shared/money/text-of';
 import { formatDecimal } from '#shared/units/format-decimal';
 import { formatLength } from '#shared/units/format-length';
 import { formatsFor } from '#shared/units/formats-for';
@@ -59,7 +60,9 @@ export class Formats {
       maximumFractionDigits: 0,
       numberingSystem: 'latn',
     } as const;
-    return new Intl.NumberFormat(this.locale(), options).format(amount_minor / 10 ** this.currencyDigits());
+    const format = new Intl.NumberFormat(this.locale(), options);
+    // A decimal text is formatted digit by digit, where a division would make a float of it.
+    return format.format(textOf(amount_minor, this.currencyDigits()) as unknown as number);
   }
 
   /** A plain number with at most and at least so many decimals, grouped as the locale has it. */

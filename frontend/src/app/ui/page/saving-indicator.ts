@@ -29,6 +29,10 @@ import { Saving } from '../../core/saving/saving';
       white-space: nowrap;
     }
 
+    :host(:empty) {
+      display: none;
+    }
+
     .warn {
       color: var(--warn);
     }

@@ -75,12 +75,14 @@ export class FigureTable<Row> {
   }
 
   protected press(event: KeyboardEvent): void {
-    if (this.draft() !== undefined || event.altKey || event.metaKey) return;
+    if (event.altKey || event.metaKey) return;
+    const isWritten = event.key.length === 1 && event.key !== ' ' && !event.ctrlKey;
+    // The editor has opened but is not there yet: fast fingers lose nothing.
+    if (this.draft() !== undefined) return isWritten ? this.draft.update((text) => `${text}${event.key}`) : undefined;
     const next = placeAfter(event.ctrlKey ? `Control+${event.key}` : event.key, this.place(), this.size());
     if (next) this.move(next);
     else if (event.key === 'Enter' || event.key === 'F2') this.open();
-    else if (event.key.length === 1 && event.key !== ' ' && !event.ctrlKey && this.isEditable())
-      this.draft.set(event.key);
+    else if (isWritten && this.isEditable()) this.draft.set(event.key);
     else return;
     event.preventDefault();
     this.focusCell();
