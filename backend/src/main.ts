@@ -1,53 +1,78 @@
+import { join } from 'node:path';
+import { demonstrationPeople } from '../../seeders/demonstration-people';
+import { seedDemonstration } from '../../seeders/seed-demonstration';
 import { migrations } from '../migrations';
-import { openApp } from './app';
+import { openApp, type App } from './app';
 import { systemClock } from './platform/clock/clock';
-import { readConfig } from './platform/config/config';
-import { unsafeSettings } from './platform/database/durability';
+import { readConfig, type Config } from './platform/config/config';
+import { refuseUnsafeSettings } from './platform/database/durability';
 import { migrate } from './platform/database/migrate';
 import { listen, stopListening } from './platform/listening-server';
-import { openLog } from './platform/log/log';
+import { logDestination, openLog } from './platform/log/log';
+import { MailCatcher } from './platform/mail/mail-catcher';
 import { openPlatform } from './platform/open-platform';
+import type { Platform } from './platform/platform';
 
 const sweepEvery_milliseconds = 15 * 60_000;
+
+/** Mail goes to the server that is configured; without one it is caught and shown on the machine itself. */
+async function connectMail({ config, mailbox }: Platform): Promise<MailCatcher | undefined> {
+  if (config.smtpUrl) return void mailbox.connect(config.smtpUrl);
+  if (config.seedsOnly) return undefined;
+  const catcher = new MailCatcher(join(config.dataFolder, 'mail'));
+  mailbox.connect(await catcher.start(), false);
+  return catcher;
+}
+
+/** What whoever started the server may tell its user. */
+const readyMessage = ({ demonstrationPassword, publicUrl }: Config, catcher: MailCatcher | undefined) => ({
+  demonstration: demonstrationPassword && {
+    password: demonstrationPassword,
+    people: demonstrationPeople.map(({ email, roles }) => ({ email, role: roles.join(', ') })),
+  },
+  mail: catcher && !publicUrl ? '/development/mail' : undefined,
+});
+
+function sweepNowAndThen(app: App, { log }: Platform): NodeJS.Timeout {
+  const sweep = () => void app.sweep().catch((error: unknown) => log.error({ error }, 'sweeping failed'));
+  return setInterval(sweep, sweepEvery_milliseconds);
+}
 
 /** Starts the server as the environment says, and answers how to stop it again. */
 async function start(): Promise<() => Promise<void>> {
   const config = readConfig(process.env);
-  const log = openLog(config.logLevel);
   await migrate(config.migrationDatabaseUrl, migrations);
-  const platform = openPlatform(config, systemClock, log);
-  const unsafe = await unsafeSettings(platform.database);
-  if (unsafe.length > 0 && !config.mayBeUnsafe)
-    throw new Error(`The database could lose what it has confirmed: ${unsafe.join(', ')}.`);
-  const app = openApp(platform);
+  const platform = openPlatform(config, systemClock, openLog(config.logLevel, logDestination(config.logFile)));
+  await refuseUnsafeSettings(platform.database, config.mayBeUnsafe);
+  const catcher = await connectMail(platform);
+  const app = openApp(platform, catcher);
+  if (config.demonstrationPassword) await seedDemonstration(app, platform, config.demonstrationPassword);
+  if (config.seedsOnly) return () => platform.database.close();
   const server = await listen(app.web, config.port);
   platform.tasks.start();
-  const sweeping = setInterval(
-    () => void app.web.sweep().catch((error: unknown) => log.error({ error }, 'sweeping failed')),
-    sweepEvery_milliseconds,
-  );
-  log.info({ port: config.port }, 'ready');
-  process.send?.({ ready: true });
+  const sweeping = sweepNowAndThen(app, platform);
+  process.send?.(readyMessage(config, catcher));
   return async () => {
     clearInterval(sweeping);
     await stopListening(server, app.web);
     await platform.tasks.stop();
+    await catcher?.stop();
     await platform.database.close();
   };
 }
 
-start().then(
-  (stop) => {
-    let stopping = false;
-    const end = (): void => {
-      if (stopping) return;
-      stopping = true;
-      void stop().then(() => process.exit(0));
-    };
-    process.on('SIGTERM', end).on('SIGINT', end).on('disconnect', end);
-  },
-  (error: unknown) => {
-    process.stderr.write(`${(error as Error).message}\n`);
-    process.exit(1);
-  },
-);
+function stopWhenAsked(stop: () => Promise<void>): void {
+  let stopping = false;
+  const end = (): void => {
+    if (stopping) return;
+    stopping = true;
+    void stop().then(() => process.exit(0));
+  };
+  process.on('SIGTERM', end).on('SIGINT', end).on('disconnect', end);
+  if (process.env['SEED_ONLY']) end();
+}
+
+start().then(stopWhenAsked, (error: unknown) => {
+  process.stderr.write(`${(error as Error).message}\n`);
+  process.exit(1);
+});

@@ -19,8 +19,10 @@ export const configSchema = z
       .optional(),
     MAIL_FROM: z.email().default('workshop@bolewright.invalid'),
     LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('info'),
+    LOG_FILE: z.string().min(1).optional(),
     REQUESTS_PER_MINUTE: z.coerce.number().int().min(1).default(900),
     DEMONSTRATION_PASSWORD: z.string().min(15).optional(),
+    SEED_ONLY: z.literal('yes').optional(),
     WEB_DIR: z.string().min(1).default('dist/web'),
     ALLOW_UNSAFE_DURABILITY: z.literal('yes').optional(),
   })
@@ -35,7 +37,9 @@ export const configSchema = z
     smtpUrl: env.SMTP_URL,
     mailFrom: env.MAIL_FROM,
     logLevel: env.LOG_LEVEL,
+    logFile: env.LOG_FILE,
     requestsPerMinute: env.REQUESTS_PER_MINUTE,
     demonstrationPassword: env.DEMONSTRATION_PASSWORD,
+    seedsOnly: env.SEED_ONLY === 'yes',
     mayBeUnsafe: env.ALLOW_UNSAFE_DURABILITY === 'yes',
   }));

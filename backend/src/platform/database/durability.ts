@@ -22,3 +22,9 @@ export async function unsafeSettings(database: Database): Promise<string[]> {
     .filter(({ name, value }) => name in wanted && value !== wanted[name] && (name !== 'sync_binlog' || keepsBinaryLog))
     .map(({ name, value }) => `${name}=${value} (must be ${wanted[name]})`);
 }
+
+/** Refuses a database that could lose what it has confirmed, unless whoever started the server accepts that. */
+export async function refuseUnsafeSettings(database: Database, isAccepted: boolean): Promise<void> {
+  const unsafe = isAccepted ? [] : await unsafeSettings(database);
+  if (unsafe.length > 0) throw new Error(`The database could lose what it has confirmed: ${unsafe.join(', ')}.`);
+}

@@ -6,7 +6,7 @@ export type Log = Logger;
 const secrets = ['password', 'current', 'token', 'csrf', 'cookie', 'authorization', 'secret'];
 
 /** One JSON line per event, in UTC; JSON escapes CR and LF, so no text from outside can begin a line of its own. */
-export const openLog = (level: string, destination?: DestinationStream): Log =>
+export const openLog = (level: string, destination: DestinationStream): Log =>
   pino(
     {
       level,
@@ -14,5 +14,9 @@ export const openLog = (level: string, destination?: DestinationStream): Log =>
       timestamp: pino.stdTimeFunctions.isoTime,
       redact: { paths: secrets.flatMap((name) => [name, `*.${name}`, `*.*.${name}`]), censor: '[kept out]' },
     },
-    destination ?? pino.destination({ dest: 1, sync: false }),
+    destination,
   );
+
+/** A file, or else standard output. */
+export const logDestination = (file: string | undefined): DestinationStream =>
+  pino.destination({ dest: file ?? 1, mkdir: true, sync: true, mode: 0o600 });

@@ -1,0 +1,32 @@
+import { context, build } from 'esbuild';
+import { dirname, join } from 'node:path';
+import { fileURLToPath, pathToFileURL } from 'node:url';
+
+const root = join(dirname(fileURLToPath(import.meta.url)), '../..');
+
+/** Packages stay outside, `#shared` and everything of ours goes in. */
+const options = {
+  absWorkingDir: root,
+  entryPoints: ['backend/src/main.ts'],
+  outfile: 'dist/server/main.js',
+  bundle: true,
+  platform: 'node',
+  target: 'node20',
+  format: 'cjs',
+  sourcemap: true,
+  packages: 'external',
+  logLevel: 'warning',
+};
+
+/** Bundles the server into dist/server. */
+export const buildServer = () => build(options);
+
+/** Bundles again at every change and says so. */
+export async function watchServer(onBuilt) {
+  const plugin = { name: 'tell', setup: ({ onEnd }) => onEnd(({ errors }) => errors.length === 0 && onBuilt()) };
+  const watching = await context({ ...options, plugins: [plugin] });
+  await watching.watch();
+  return () => watching.dispose();
+}
+
+if (import.meta.url === pathToFileURL(process.argv[1] ?? '').href) await buildServer();

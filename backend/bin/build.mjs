@@ -1,0 +1,57 @@
+import { spawn } from 'node:child_process';
+import { existsSync } from 'node:fs';
+import { dirname, join } from 'node:path';
+import { fileURLToPath } from 'node:url';
+import { buildServer } from './build-server.mjs';
+import { isCurrent, stampOf, writeStamp } from './source-stamp.mjs';
+
+const root = join(dirname(fileURLToPath(import.meta.url)), '../..');
+const inRoot = (...names) => names.map((name) => join(root, name));
+const [ng] = inRoot('node_modules/@angular/cli/bin/ng.js');
+
+const parts = [
+  {
+    name: 'the pages (half a minute)',
+    stampFile: join(root, '.cache/built-pages.txt'),
+    result: join(root, 'dist/web/index.html'),
+    sources: inRoot('frontend', 'shared', 'fonts', 'angular.json', 'package-lock.json', 'tsconfig.json'),
+    build: () => run(process.execPath, [ng, 'build', '--progress=false']),
+  },
+  {
+    name: 'the server',
+    stampFile: join(root, '.cache/built-server.txt'),
+    result: join(root, 'dist/server/main.js'),
+    sources: inRoot('backend/src', 'backend/migrations', 'seeders', 'shared', 'package-lock.json'),
+    build: buildServer,
+  },
+];
+
+function run(command, args) {
+  return new Promise((resolve, reject) => {
+    const child = spawn(command, args, { cwd: root, stdio: ['ignore', 'ignore', 'inherit'] });
+    child.once('error', reject);
+    child.once('exit', (code) =>
+      code === 0 ? resolve() : reject(new Error('The pages could not be built; the reasons stand above.')),
+    );
+  });
+}
+
+/** Builds what has changed since it was built last. */
+export async function buildWhatChanged(say) {
+  for (const part of parts) {
+    const stamp = stampOf(part.sources);
+    if (existsSync(part.result) && isCurrent(part.stampFile, stamp)) continue;
+    say(`Building ${part.name} …`);
+    await part.build();
+    writeStamp(part.stampFile, stamp);
+  }
+}
+
+/** Builds the pages again at every change; answers how to end it. */
+export function watchPages() {
+  const child = spawn(process.execPath, [ng, 'build', '--watch', '--configuration', 'development'], {
+    cwd: root,
+    stdio: ['ignore', 'inherit', 'inherit'],
+  });
+  return () => child.kill('SIGTERM');
+}

@@ -1,0 +1,39 @@
+import type { App } from '../backend/src/app';
+import type { Platform } from '../backend/src/platform/platform';
+import {
+  demonstrationPeople,
+  demonstrationSettings,
+  demonstrationWorkshop,
+  type DemonstrationPerson,
+} from './demonstration-people';
+
+async function welcome(app: App, person: DemonstrationPerson, password: string) {
+  const entry = { name: person.name, email: person.email, password, address: 'demonstration' };
+  const { id: accountId, name } = await app.accounts.newcomers.welcome(entry, demonstrationWorkshop.name);
+  return { accountId, name, roles: person.roles };
+}
+
+/** Founds the workshop with its people and settings; answers its owner as they act there. */
+async function foundWorkshop(app: App, password: string) {
+  const [first, ...others] = demonstrationPeople;
+  const owner = await welcome(app, first, password);
+  const workshopId = await app.accounts.workshops.found(owner, demonstrationWorkshop);
+  for (const person of others) await app.accounts.workshops.join(workshopId, await welcome(app, person, password));
+  const people = await app.accounts.people.list(workshopId);
+  const membershipId = people.find(({ accountId }) => accountId === owner.accountId)?.id ?? '';
+  const actor = { ...owner, membershipId, workshopId };
+  await app.accounts.workshops.change(actor, 1, {
+    ...demonstrationSettings,
+    addressLines: [...demonstrationSettings.addressLines],
+  });
+  return actor;
+}
+
+/** Puts the demonstration into an empty database, once; answers whether it did. Everything goes through services and so obeys every rule. */
+export function seedDemonstration(app: App, { database }: Platform, password: string): Promise<boolean> {
+  return database.transaction(async () => {
+    if (await app.accounts.isAnyFounded()) return false;
+    await foundWorkshop(app, password);
+    return true;
+  });
+}
