@@ -1,7 +1,7 @@
 import { lotWorks } from '#shared/buildups/lot-works';
 import { setUpDays } from '#shared/buildups/set-up-days';
 import { startBuildUps } from '#shared/buildups/start-buildups';
-import { zone } from '#shared/buildups/zone-for-specs';
+import { zoneForSpecs as zone } from '#shared/buildups/zone-for-specs';
 
 const card = startBuildUps;
 const stepOf = (buildUpId: string, stepId: string) => {

@@ -1,7 +1,9 @@
 import type { BuildUp, BuildUpStep, System } from '#shared/buildups/buildup';
 import type { BuildUpCard } from '#shared/buildups/buildup-card';
 import { startMaterials, startRecipes } from '#shared/buildups/start-materials';
-import {
+import { sizeKinds, startSteps, type SizeKind } from '#shared/buildups/start-steps';
+
+const {
   burnish,
   clean,
   colouredGround,
@@ -27,7 +29,6 @@ import {
   sealWhereNeeded,
   secondLaying,
   sizeCoat,
-  sizeKinds,
   skewOff,
   smooth,
   tone,
@@ -35,8 +36,7 @@ import {
   varnish,
   waterGesso,
   yellowBole,
-  type SizeKind,
-} from '#shared/buildups/start-steps';
+} = startSteps;
 
 const hour = 60;
 const day = 24 * hour;

@@ -8,7 +8,8 @@ const same = (minutes: number): Triple => triple(minutes, minutes, minutes);
 const hour = 60;
 const day = 24 * hour;
 
-export const everywhere = (coats: number): Coats => ({
+/** The same number of coats on every surface. */
+const everywhere = (coats: number): Coats => ({
   plain: coats,
   moulded: coats,
   carved: coats,
@@ -16,7 +17,8 @@ export const everywhere = (coats: number): Coats => ({
   frenchRecut: coats,
 });
 
-export const dries = (model: ClimateModel, rest: Partial<StepDrying> = {}): StepDrying => ({
+/** Drying that asks for nothing but what is given, in minutes at 20 °C and 50 % RH. */
+const dries = (model: ClimateModel, rest: Partial<StepDrying> = {}): StepDrying => ({
   model,
   betweenCoats_minutes: same(0),
   latestCoat_minutes: null,
@@ -75,7 +77,8 @@ const shellacDrying = dries('spirit', {
 });
 const shellacNote = 'Recoats in 30 to 60 minutes (suppliers); hours and coverage house.';
 
-export const sizeCoat = (holds: BuildUpStep['holds'] = ['carving-approved', 'top-dry-fitted']): BuildUpStep =>
+/** A size coat, waiting for what is to be approved first. */
+const sizeCoat = (holds: BuildUpStep['holds'] = ['carving-approved', 'top-dry-fitted']): BuildUpStep =>
   step({
     id: 'size-coat',
     kind: 'size-coat',
@@ -89,7 +92,8 @@ export const sizeCoat = (holds: BuildUpStep['holds'] = ['carving-approved', 'top
     note: 'Size coat 4 : 1 to 10 : 1 water to dry glue by volume, never above 55 °C (Rivers & Umney 2003, pp. 648–650); hours and drying house.',
   });
 
-export const gesso = (coats: Coats): BuildUpStep =>
+/** Gesso in coats by surface; half of them bound with 10 : 1, the rest with 12 : 1. */
+const gesso = (coats: Coats): BuildUpStep =>
   step({
     id: 'gesso',
     kind: 'gesso',
@@ -114,10 +118,10 @@ export const gesso = (coats: Coats): BuildUpStep =>
     note: 'Eight coats on flats, fewer on carving (Colyton House; 8–10 at Versailles, 2021; 7–9 in TSN-2001.7-20); size 10 : 1 to 15 : 1 (Rivers & Umney, pp. 648–650); times house.',
   });
 
-export const waterGesso = gesso({ plain: 8, moulded: 6, carved: 4, recut: 8, frenchRecut: 11 });
-export const oilGesso = gesso({ plain: 5, moulded: 5, carved: 5, recut: 8, frenchRecut: 11 });
+const waterGesso = gesso({ plain: 8, moulded: 6, carved: 4, recut: 8, frenchRecut: 11 });
+const oilGesso = gesso({ plain: 5, moulded: 5, carved: 5, recut: 8, frenchRecut: 11 });
 
-export const recut = step({
+const recut = step({
   id: 'recut',
   kind: 'recut',
   name: 'Recut in gesso',
@@ -127,7 +131,7 @@ export const recut = step({
   note: 'Hours come with the carving.',
 });
 
-export const smooth = step({
+const smooth = step({
   id: 'smooth',
   kind: 'smooth',
   name: 'Smooth',
@@ -138,7 +142,7 @@ export const smooth = step({
 const boleCoverage = (itemId: string): MaterialUse[] => [covers(itemId, 10), covers('size-15', 10, 'recipe')];
 const boleNote = 'Two to six coats of bole in all; hours, coverage and drying house.';
 
-export const yellowBole = step({
+const yellowBole = step({
   id: 'yellow-bole',
   kind: 'bole',
   name: 'Yellow bole',
@@ -151,7 +155,8 @@ export const yellowBole = step({
   note: boleNote,
 });
 
-export const redBole = (coats: number): BuildUpStep =>
+/** Red bole in so many coats, an hour between them and four before laying. */
+const redBole = (coats: number): BuildUpStep =>
   step({
     id: 'red-bole',
     kind: 'bole',
@@ -165,7 +170,7 @@ export const redBole = (coats: number): BuildUpStep =>
     note: boleNote,
   });
 
-export const polishBole = step({
+const polishBole = step({
   id: 'polish-bole',
   kind: 'polish-bole',
   name: 'Polish bole',
@@ -176,7 +181,7 @@ export const polishBole = step({
 const layingNote = 'Minutes by the leaf or piece are house values; leaves come from the leaf worked out.';
 
 /** Wet and lay in water; burnishing, where it follows, is finished within 24 h of the start of laying. */
-export const layInWater = (burnishId: string | null): BuildUpStep =>
+const layInWater = (burnishId: string | null): BuildUpStep =>
   step({
     id: 'lay',
     kind: 'lay',
@@ -190,7 +195,7 @@ export const layInWater = (burnishId: string | null): BuildUpStep =>
     note: layingNote,
   });
 
-export const layOnSize = step({
+const layOnSize = step({
   id: 'lay',
   kind: 'lay',
   name: 'Lay',
@@ -200,7 +205,7 @@ export const layOnSize = step({
   note: layingNote,
 });
 
-export const fault = step({
+const fault = step({
   id: 'fault',
   kind: 'fault',
   name: 'Fault',
@@ -208,7 +213,7 @@ export const fault = step({
   note: layingNote,
 });
 
-export const secondLaying = step({
+const secondLaying = step({
   id: 'second-laying',
   kind: 'second-laying',
   name: 'Second laying',
@@ -217,7 +222,8 @@ export const secondLaying = step({
   note: 'Burnishing from about 1 h in dry summer air to 5 h or next day (Cennini, ch. CXXXVII; suppliers); minutes house.',
 });
 
-export const burnish = (areaPart: BuildUpStep['areaPart'], drying: Partial<StepDrying> = {}): BuildUpStep =>
+/** Burnishing, 2.5 h/m² of a zone or of its burnished part. */
+const burnish = (areaPart: BuildUpStep['areaPart'], drying: Partial<StepDrying> = {}): BuildUpStep =>
   step({
     id: 'burnish',
     kind: 'burnish',
@@ -227,7 +233,8 @@ export const burnish = (areaPart: BuildUpStep['areaPart'], drying: Partial<StepD
     drying: dries('spirit', drying),
   });
 
-export const matteSize = (areaPart: BuildUpStep['areaPart']): BuildUpStep =>
+/** Matte size on a zone or on its matte part, dry in an hour. */
+const matteSize = (areaPart: BuildUpStep['areaPart']): BuildUpStep =>
   step({
     id: 'matte-size',
     kind: 'matte-size',
@@ -240,14 +247,14 @@ export const matteSize = (areaPart: BuildUpStep['areaPart']): BuildUpStep =>
     colour: 'size',
   });
 
-export const protectEdge = step({
+const protectEdge = step({
   id: 'protect-edge',
   kind: 'protect-edge',
   name: 'Protect the edge',
   work: { way: 'edge' },
 });
 
-export const tone = step({
+const tone = step({
   id: 'tone',
   kind: 'tone',
   name: 'Tone',
@@ -257,7 +264,8 @@ export const tone = step({
   colour: 'tone',
 });
 
-export const seal = (id: string, rest: Partial<BuildUpStep> = {}): BuildUpStep =>
+/** A seal of shellac, with what is different about it. */
+const seal = (id: string, rest: Partial<BuildUpStep> = {}): BuildUpStep =>
   step({
     id,
     kind: 'seal',
@@ -271,9 +279,9 @@ export const seal = (id: string, rest: Partial<BuildUpStep> = {}): BuildUpStep =
     ...rest,
   });
 
-export const sealWhereNeeded = seal('seal', { name: 'Seal where needed', optional: true });
+const sealWhereNeeded = seal('seal', { name: 'Seal where needed', optional: true });
 
-export const sealer = step({
+const sealer = step({
   id: 'sealer',
   kind: 'sealer',
   name: 'Sealer',
@@ -287,7 +295,7 @@ export const sealer = step({
   note: shellacNote,
 });
 
-export const colouredGround = step({
+const colouredGround = step({
   id: 'coloured-ground',
   kind: 'coloured-ground',
   name: 'Coloured ground',
@@ -352,7 +360,8 @@ export const sizeKinds = {
   },
 } satisfies Record<string, SizeKind>;
 
-export const oilSize = (size: SizeKind, sealId: string): BuildUpStep =>
+/** A size that takes leaf by its tack, and the least time before the seal named where it is slow. */
+const oilSize = (size: SizeKind, sealId: string): BuildUpStep =>
   step({
     id: 'size',
     kind: 'oil-size',
@@ -374,9 +383,10 @@ export const oilSize = (size: SizeKind, sealId: string): BuildUpStep =>
     note: size.note,
   });
 
-export const skewOff = step({ id: 'skew-off', kind: 'skew-off', name: 'Skew off', work: hoursPer_m2(0.4) });
+const skewOff = step({ id: 'skew-off', kind: 'skew-off', name: 'Skew off', work: hoursPer_m2(0.4) });
 
-export const leave = (window_minutes: number | null = null): BuildUpStep =>
+/** Two days of rest after laying on size; null leaves what follows open, else it starts within so many minutes more. */
+const leave = (window_minutes: number | null = null): BuildUpStep =>
   step({
     id: 'leave',
     kind: 'leave',
@@ -389,7 +399,7 @@ export const leave = (window_minutes: number | null = null): BuildUpStep =>
     note: 'After laying on oil size leave 48 h (Rivers & Umney 2003, p. 665).',
   });
 
-export const isolate = step({
+const isolate = step({
   id: 'isolate',
   kind: 'isolate',
   name: 'Isolating coat',
@@ -403,7 +413,7 @@ export const isolate = step({
   note: shellacNote,
 });
 
-export const transferDrawing = step({
+const transferDrawing = step({
   id: 'transfer',
   kind: 'transfer-drawing',
   name: 'Transfer the drawing',
@@ -411,7 +421,7 @@ export const transferDrawing = step({
   gradeId: 'finisher',
 });
 
-export const glaze = step({
+const glaze = step({
   id: 'glaze',
   kind: 'glaze',
   name: 'Transparent glaze',
@@ -428,7 +438,8 @@ export const glaze = step({
   note: 'Glaze with alkyd medium is touch dry in 1 to 3 days (suppliers); an oil glaze takes 72 h, house.',
 });
 
-export const varnish = (coats: number, optional = false): BuildUpStep =>
+/** Varnish in so many coats, a day for each. */
+const varnish = (coats: number, optional = false): BuildUpStep =>
   step({
     id: 'varnish',
     kind: 'varnish',
@@ -443,7 +454,8 @@ export const varnish = (coats: number, optional = false): BuildUpStep =>
     colour: 'varnish',
   });
 
-export const paint = (given: {
+/** Paint in so many coats of one name, with its drying in minutes. */
+const paint = (given: {
   id: string;
   name: string;
   coats: number;
@@ -466,7 +478,7 @@ export const paint = (given: {
     colour: 'paint',
   });
 
-export const clean = step({
+const clean = step({
   id: 'clean',
   kind: 'clean',
   name: 'Clean',
@@ -475,7 +487,7 @@ export const clean = step({
   cautions: ['lead', 'solvents'],
 });
 
-export const consolidate = step({
+const consolidate = step({
   id: 'consolidate',
   kind: 'consolidate',
   name: 'Consolidate old ground',
@@ -484,3 +496,40 @@ export const consolidate = step({
   drying: dries('water', { beforeNext_minutes: same(12 * hour) }),
   cautions: ['lead', 'glue-allergy', 'glue-heat'],
 });
+
+/** Every step the start build-ups are put together from. */
+export const startSteps = {
+  everywhere,
+  dries,
+  sizeCoat,
+  gesso,
+  waterGesso,
+  oilGesso,
+  recut,
+  smooth,
+  yellowBole,
+  redBole,
+  polishBole,
+  layInWater,
+  layOnSize,
+  fault,
+  secondLaying,
+  burnish,
+  matteSize,
+  protectEdge,
+  tone,
+  seal,
+  sealWhereNeeded,
+  sealer,
+  colouredGround,
+  oilSize,
+  skewOff,
+  leave,
+  isolate,
+  transferDrawing,
+  glaze,
+  varnish,
+  paint,
+  clean,
+  consolidate,
+};

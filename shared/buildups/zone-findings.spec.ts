@@ -5,7 +5,7 @@ import { laidGroundOf } from '#shared/buildups/laid-ground-of';
 import { sectionStrip } from '#shared/buildups/section-strip';
 import { sizeStrengthFindings } from '#shared/buildups/size-strength-findings';
 import { startBuildUps } from '#shared/buildups/start-buildups';
-import { zone } from '#shared/buildups/zone-for-specs';
+import { zoneForSpecs as zone } from '#shared/buildups/zone-for-specs';
 import { zoneFindings } from '#shared/buildups/zone-findings';
 
 const card = startBuildUps;

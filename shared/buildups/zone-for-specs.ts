@@ -1,7 +1,7 @@
 import type { ZoneFacts } from '#shared/buildups/zone-facts';
 
 /** A plain square metre to be water gilded and burnished, with what a check changes; for specs only. */
-export const zone = (given: Partial<ZoneFacts>): ZoneFacts => ({
+export const zoneForSpecs = (given: Partial<ZoneFacts>): ZoneFacts => ({
   id: 'zone',
   pieceId: 'piece',
   buildUpId: 'water-burnished',

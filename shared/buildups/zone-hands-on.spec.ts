@@ -1,7 +1,7 @@
 import * as fc from 'fast-check';
 import { layingCounts } from '#shared/buildups/laying-counts';
 import { startBuildUps } from '#shared/buildups/start-buildups';
-import { zone } from '#shared/buildups/zone-for-specs';
+import { zoneForSpecs as zone } from '#shared/buildups/zone-for-specs';
 import type { ZoneFacts } from '#shared/buildups/zone-facts';
 import { zoneHandsOn } from '#shared/buildups/zone-hands-on';
 

@@ -2,7 +2,7 @@ import { batchRecipe } from '#shared/buildups/batch-recipe';
 import type { BuildUpCard } from '#shared/buildups/buildup-card';
 import { materialsBought } from '#shared/buildups/materials-bought';
 import { startBuildUps } from '#shared/buildups/start-buildups';
-import { zone } from '#shared/buildups/zone-for-specs';
+import { zoneForSpecs as zone } from '#shared/buildups/zone-for-specs';
 import type { ZoneFacts } from '#shared/buildups/zone-facts';
 import { zoneMaterials, type MaterialNeed } from '#shared/buildups/zone-materials';
 import * as fc from 'fast-check';

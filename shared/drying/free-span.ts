@@ -1,4 +1,5 @@
-import { endOfWork, nextWorkingMinute } from '#shared/drying/working-clock';
+import { endOfWork } from '#shared/drying/end-of-work';
+import { nextWorkingMinute } from '#shared/drying/next-working-minute';
 import type { WorkingTime } from '#shared/drying/working-time';
 
 /** A span in clock minutes, from the start of the job. */

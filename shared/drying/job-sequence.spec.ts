@@ -1,11 +1,12 @@
 import * as fc from 'fast-check';
 import { lotWorks } from '#shared/buildups/lot-works';
 import { startBuildUps } from '#shared/buildups/start-buildups';
-import { zone } from '#shared/buildups/zone-for-specs';
+import { zoneForSpecs as zone } from '#shared/buildups/zone-for-specs';
 import { jobSequence, type JobRequest } from '#shared/drying/job-sequence';
 import { lotSequence, type LotSequence, type SequenceStep } from '#shared/drying/lot-sequence';
 import { startDrying } from '#shared/drying/start-drying';
-import { nextWorkingMinute, workingDaysUntil } from '#shared/drying/working-clock';
+import { nextWorkingMinute } from '#shared/drying/next-working-minute';
+import { workingDaysUntil } from '#shared/drying/working-days-until';
 import { workingTime } from '#shared/drying/working-time';
 
 const time = { day_minutes: 480, days: 5, productiveShare_percent: 100 };
@@ -160,6 +161,9 @@ describe('lots laid into a working week', () => {
       { system: 'water' },
     );
     const oil = lot('o', [step('gesso', 30), step('size', 30, { kind: 'oil-size' })], { system: 'oil' });
+    expect(plan([water, oil]).findings).toMatchObject([
+      { kind: 'note', code: 'buildup-order-of-systems', about: 'piece' },
+    ]);
     const tasks = plan([water, oil]).tasks;
     const end = tasks.find((task) => task.step.stepId === 'edge')?.end_minutes;
     expect(tasks.find((task) => task.step.stepId === 'gesso')?.start_minutes).toBe(60);

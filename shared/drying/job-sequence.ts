@@ -1,10 +1,14 @@
 import type { HoldPoint } from '#shared/buildups/buildup';
+import { systemOrderFindings } from '#shared/buildups/system-order-findings';
 import type { Span } from '#shared/drying/free-span';
 import type { LotSequence, SequenceStep } from '#shared/drying/lot-sequence';
 import { placedInPortions, type PlacedTask } from '#shared/drying/placed-in-portions';
 import type { PlacedCoat } from '#shared/drying/placed-block';
 import { stepBlocks } from '#shared/drying/step-blocks';
-import { dayLength_minutes, endOfWork, nextWorkingMinute, workingDaysUntil } from '#shared/drying/working-clock';
+import { dayLength_minutes } from '#shared/drying/day-length-minutes';
+import { endOfWork } from '#shared/drying/end-of-work';
+import { nextWorkingMinute } from '#shared/drying/next-working-minute';
+import { workingDaysUntil } from '#shared/drying/working-days-until';
 import type { WorkingTime } from '#shared/drying/working-time';
 import type { Finding } from '#shared/words/finding';
 
@@ -118,7 +122,7 @@ function lotSpan(
  * overlapped by other lots' work, holds waited for, windows kept by choosing the start or working in portions. Elapsed minutes, working days and weeks.
  */
 export function jobSequence(request: JobRequest): JobSequence {
-  const plan: Plan = { taken: new Map(), waterDone: new Map(), tasks: [], findings: [] };
+  const plan: Plan = { taken: new Map(), waterDone: new Map(), tasks: [], findings: systemOrderFindings(request.lots) };
   const lots = request.lots.map((lot) => placeLot(lot, request, plan));
   const elapsed_minutes = Math.max(0, ...lots.map((lot) => lot.end_minutes));
   return {

@@ -1,7 +1,7 @@
 import * as fc from 'fast-check';
 import { lotWorks } from '#shared/buildups/lot-works';
 import { startBuildUps } from '#shared/buildups/start-buildups';
-import { zone } from '#shared/buildups/zone-for-specs';
+import { zoneForSpecs as zone } from '#shared/buildups/zone-for-specs';
 import type { Climate } from '#shared/drying/climate';
 import { lotSequence } from '#shared/drying/lot-sequence';
 import { startDrying } from '#shared/drying/start-drying';

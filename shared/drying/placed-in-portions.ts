@@ -1,6 +1,7 @@
 import { placedBlock, type PlacedCoat, type Placing } from '#shared/drying/placed-block';
 import type { StepBlock } from '#shared/drying/step-blocks';
-import { dayLength_minutes, nextWorkingMinute } from '#shared/drying/working-clock';
+import { dayLength_minutes } from '#shared/drying/day-length-minutes';
+import { nextWorkingMinute } from '#shared/drying/next-working-minute';
 import type { Finding } from '#shared/words/finding';
 
 /** One stretch of work on one lot: a coat of a step, or of a portion of it. */

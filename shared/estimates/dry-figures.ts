@@ -2,7 +2,7 @@ import type { EstimateWork } from '#shared/estimates/estimate-work';
 import type { EstimateSettings } from '#shared/estimates/settings';
 import { jobSequence, type JobSequence, type LotSpan } from '#shared/drying/job-sequence';
 import { lotSequence, type LotSequence } from '#shared/drying/lot-sequence';
-import { endOfWork } from '#shared/drying/working-clock';
+import { endOfWork } from '#shared/drying/end-of-work';
 import { workingTime, type WorkingTime } from '#shared/drying/working-time';
 import { countUp } from '#shared/money/settled';
 import type { RateCard } from '#shared/rate-cards/rate-card';

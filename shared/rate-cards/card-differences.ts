@@ -1,4 +1,4 @@
-import { entriesOf, isItemList, isRecord, keysOf, moves, type Item } from '#shared/rate-cards/card-walk';
+import { entriesOf, isItemList, isRecord, keysOf, moves, type CardItem } from '#shared/rate-cards/card-item';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 
 /** A figure, name or choice of a card; null where there is none. */
@@ -9,8 +9,9 @@ export const cardSections = ['measure', 'carving', 'leaf', 'buildUps', 'drying',
 export type CardSection = (typeof cardSections)[number];
 
 /**
- * One line of difference between two cards. `list` names the list an item stands in ("buildUps/steps"), `itemId` and `itemName` name the item with those it stands in ("water-burnished/gesso"), empty for
- * a figure of the part itself; `field` is the path below it, empty where an item was added, removed or moved (then the values are its name or place).
+ * One line of difference between two cards. `list` names the list an item stands in ("buildUps/steps"); `itemId` and `itemName` name
+ * the item with those it stands in ("water-burnished/gesso"), all empty for a figure of the part itself. `field` is the path below it,
+ * empty where an item was added, removed or moved: then the values are its name or its place.
  */
 export interface CardDifference {
   readonly kind: 'changed' | 'added' | 'removed' | 'moved';
@@ -31,9 +32,9 @@ interface Place {
   readonly fields: readonly (string | number)[];
 }
 
-const nameOf = (item: Item): string => (typeof item['name'] === 'string' ? item['name'] : item.id);
+const nameOf = (item: CardItem): string => (typeof item['name'] === 'string' ? item['name'] : item.id);
 
-const inItem = (place: Place, item: Item): Place => ({
+const inItem = (place: Place, item: CardItem): Place => ({
   section: place.section,
   lists: [...place.lists, place.fields.join('.')],
   ids: [...place.ids, item.id],
@@ -58,7 +59,7 @@ function line(place: Place, kind: CardDifference['kind'], values: readonly [Card
 }
 
 /** Items are matched by their id: those of the later card in its order, then those that went. */
-function ofItems(before: readonly Item[], after: readonly Item[], place: Place): CardDifference[] {
+function ofItems(before: readonly CardItem[], after: readonly CardItem[], place: Place): CardDifference[] {
   const moved = moves(before, after);
   const kept = after.flatMap((item) => {
     const old = before.find((one) => one.id === item.id);

@@ -1,7 +1,7 @@
 import type { BuildUp, BuildUpStep } from '#shared/buildups/buildup';
 import { sizeStrength } from '#shared/buildups/size-strength';
 import { startBuildUps } from '#shared/buildups/start-buildups';
-import { zone } from '#shared/buildups/zone-for-specs';
+import { zoneForSpecs as zone } from '#shared/buildups/zone-for-specs';
 import { zoneMaterials } from '#shared/buildups/zone-materials';
 
 const buildUp = (id: string): BuildUp => {
