@@ -29,7 +29,7 @@ export const buildups = {
     '{material}: {need, number} {unit} needed, {bought, number} {unit} bought in {packs, plural, one {# pack} other {# packs}}.',
   'buildup-material-pro-rata': '{material}: {need, number} {unit} charged as it is used.',
   'buildup-material-no-pack': '{material} has no packs in the rate card, so it is charged as it is used.',
-  'buildup-batch-part': '{part}: {parts, number} parts of {total, number} in a batch of {batch_litres}.',
+  'buildup-batch-part': '{part}: {parts, plural, one {# part} other {# parts}} of {total, number} in a batch of {batch_litres}.',
   'buildup-one-batch':
     'Make one batch of size for the whole ground of a piece: two batches are never of quite one strength.',
   'buildup-water-outdoors':

@@ -10,7 +10,7 @@ export const drying = {
   'drying-too-cold': 'At {temperature_celsius} nothing made with water sets soundly. Warm the room to 5 °C at least.',
   'drying-moisture':
     'At {temperature_celsius} and {humidity_percent} wood comes to rest at {moisture_percent} moisture.',
-  'drying-movement': '{width_mm} wide × {coefficient, number} × {points, number} points of moisture.',
+  'drying-movement': '{width_mm} wide × {coefficient, number, ::.00000} × {points, number} points of moisture.',
   'drying-moisture-apart':
     'Wood settles at {shop_percent} moisture in the shop and at {site_percent} on site, more than {limit, number} points apart. Let the piece settle, or have the air of the place looked after.',
   'drying-joint-moves':
