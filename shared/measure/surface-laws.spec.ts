@@ -1,7 +1,8 @@
 import fc from 'fast-check';
+import type { Fluting } from '#shared/measure/fluting';
 import { mirrored } from '#shared/measure/mirrored';
 import { mirroredProfile } from '#shared/measure/mirrored-profile';
-import type { MouldingShape } from '#shared/measure/moulding-shape';
+import type { MouldingPlan, MouldingShape } from '#shared/measure/moulding-shape';
 import { classicalMembers, type ProfileElement } from '#shared/measure/profile-element';
 import type { Shape } from '#shared/measure/shape';
 import { shapeKinds } from '#shared/measure/shape';
@@ -42,14 +43,39 @@ const profile = fc.array(element, { minLength: 1, maxLength: 6 }).map((members) 
 );
 const factors = fc.array(fc.double({ min: 0.7, max: 1.4, noNaN: true }), { minLength: 20, maxLength: 20 });
 
+const plan = fc.constantFrom<MouldingPlan>(
+  { form: 'straight', sides_mm: [900, 500], returns_mm: [200, 150, 300] },
+  { form: 'arc', radius_mm: 600, angle_degrees: 120 },
+  { form: 'ellipse', length_mm: 1200, width_mm: 1000 },
+  { form: 'polygon', sides_mm: [700, 400, 800], turns_degrees: [45, -60], closed: false },
+  { form: 'polygon', sides_mm: [500, 600, 700, 800, 900], turns_degrees: [100, 30, 50, 110, 70], closed: true },
+);
+const edge = fc.record({
+  measuredAt: fc.constantFrom('back' as const, 'front' as const),
+  facing: fc.constantFrom('outward' as const, 'inward' as const),
+});
+const fluting = fc.option(
+  fc.constant<Fluting>({ cut: 'flutes', width_mm: 8, depth_mm: 2, between_mm: 3, share_percent: 60 }),
+  { nil: undefined },
+);
+
 /** Possible shapes of every kind, those with a profile of any profile. */
 const possible = fc
-  .tuple(fc.constantFrom(...shapeKinds), factors, profile)
-  .map(([kind, each, elements]): Shape => {
+  .record({ kind: fc.constantFrom(...shapeKinds), each: factors, elements: profile, plan, edge, fluting })
+  .map((drawn): Shape => {
+    const { each, elements } = drawn;
     let used = 0;
-    const shape = changed(shapeDefaults(kind), () => each[(used += 1) % each.length]);
-    if (shape.kind === 'moulding') return { ...shape, profile: elements };
-    return shape.kind === 'turned' ? { ...shape, radius_mm: 400, profile: elements } : shape;
+    const shape = changed(shapeDefaults(drawn.kind), () => each[(used += 1) % each.length]);
+    if (shape.kind === 'moulding')
+      return {
+        ...shape,
+        ...drawn.edge,
+        plan: changed(drawn.plan, () => each[0]),
+        profile: elements,
+        fluting: drawn.fluting,
+      };
+    if (shape.kind === 'turned') return { ...shape, radius_mm: 400, profile: elements, fluting: drawn.fluting };
+    return 'ends' in shape ? { ...shape, ends: { top: true, bottom: false } } : shape;
   })
   .filter((shape) => shapeComplaints(shape).length === 0);
 

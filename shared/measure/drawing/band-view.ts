@@ -2,8 +2,8 @@ import type { BandShape } from '#shared/measure/band-shape';
 import { bandLength, bandSides, bandStretches } from '#shared/measure/band-stretches';
 import type { DrawingDimension, DrawingPath, DrawingView } from '#shared/measure/drawing/drawing';
 import { dimension, madeView } from '#shared/measure/drawing/made-view';
-import { polylineData, spot } from '#shared/measure/drawing/path-data';
-import { closedOutline, overallDimensions, uprightCorners } from '#shared/measure/drawing/upright-figure';
+import { polylineData, spot } from '#shared/measure/drawing/polyline-data';
+import { closedOutline, overallDimensions, uprightCorners } from '#shared/measure/drawing/upright-corners';
 
 const upright = (kind: DrawingPath['kind'], at_mm: number, height_mm: number): DrawingPath => ({
   kind,

@@ -1,7 +1,7 @@
 import type { DrawingView } from '#shared/measure/drawing/drawing';
 import { madeView } from '#shared/measure/drawing/made-view';
-import { polylineData } from '#shared/measure/drawing/path-data';
-import { overallDimensions, uprightCorners } from '#shared/measure/drawing/upright-figure';
+import { polylineData } from '#shared/measure/drawing/polyline-data';
+import { overallDimensions, uprightCorners } from '#shared/measure/drawing/upright-corners';
 import type { BoxShape } from '#shared/measure/solid-shape';
 
 /** One face of a box: its view, its size in mm, and whether either of the pair it stands for counts. */

@@ -1,7 +1,7 @@
 import type { DrawingPoint, DrawingView } from '#shared/measure/drawing/drawing';
 import { boxAround, madeView } from '#shared/measure/drawing/made-view';
-import { ellipseData, spot } from '#shared/measure/drawing/path-data';
-import { axis, closedOutline, overallDimensions, uprightCorners } from '#shared/measure/drawing/upright-figure';
+import { ellipseData, spot } from '#shared/measure/drawing/polyline-data';
+import { axis, closedOutline, overallDimensions, uprightCorners } from '#shared/measure/drawing/upright-corners';
 import type { FlatShape } from '#shared/measure/flat-shape';
 
 function straightFace(corners: readonly DrawingPoint[]): DrawingView {

@@ -1,8 +1,8 @@
 import type { DrawingPath, DrawingPoint, DrawingView } from '#shared/measure/drawing/drawing';
 import { boxAround, dimension, madeView } from '#shared/measure/drawing/made-view';
-import { ellipseData, polylineData, spot } from '#shared/measure/drawing/path-data';
+import { ellipseData, polylineData, spot } from '#shared/measure/drawing/polyline-data';
 import { taperedElevation } from '#shared/measure/drawing/tapered-elevation';
-import { axis, closedOutline } from '#shared/measure/drawing/upright-figure';
+import { axis, closedOutline } from '#shared/measure/drawing/upright-corners';
 import type { CabrioleShape, StationsShape, StraightLegShape } from '#shared/measure/leg-shape';
 
 const octagonPart = Math.tan(Math.PI / 8);

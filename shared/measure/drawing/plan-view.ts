@@ -1,7 +1,7 @@
 import type { DrawingDimension, DrawingPath, DrawingPoint, DrawingView } from '#shared/measure/drawing/drawing';
 import { dimension, madeView } from '#shared/measure/drawing/made-view';
-import { arcData, ellipseData, lineData, moveData, polylineData, spot } from '#shared/measure/drawing/path-data';
-import { axis, uprightCorners } from '#shared/measure/drawing/upright-figure';
+import { arcData, ellipseData, lineData, moveData, polylineData, spot } from '#shared/measure/drawing/polyline-data';
+import { axis, uprightCorners } from '#shared/measure/drawing/upright-corners';
 import type { ArcPlan, EllipsePlan, MouldingPlan, PolygonPlan } from '#shared/measure/moulding-shape';
 
 const outline = (data: string): DrawingPath => ({ kind: 'outline', data });

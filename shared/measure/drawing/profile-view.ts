@@ -2,7 +2,7 @@ import type { Point } from '#shared/geometry/point';
 import { strokeReach } from '#shared/geometry/stroke';
 import type { DrawingDimension, DrawingPath, DrawingView } from '#shared/measure/drawing/drawing';
 import { boxAround, dimension, madeView } from '#shared/measure/drawing/made-view';
-import { polylineData, spot } from '#shared/measure/drawing/path-data';
+import { polylineData, spot } from '#shared/measure/drawing/polyline-data';
 import { placed, strokesData } from '#shared/measure/drawing/stroke-data';
 import { drawnStrokes, profileCurve, type ProfilePiece } from '#shared/measure/profile-curve';
 import type { ProfileElement } from '#shared/measure/profile-element';

@@ -2,9 +2,9 @@ import { spheroidRadiusAt } from '#shared/geometry/spheroid-zone-area';
 import { boxViews } from '#shared/measure/drawing/box-views';
 import type { DrawingView } from '#shared/measure/drawing/drawing';
 import { dimension, madeView } from '#shared/measure/drawing/made-view';
-import { arcData, ellipseData, lineData, moveData, spot } from '#shared/measure/drawing/path-data';
+import { arcData, ellipseData, lineData, moveData, spot } from '#shared/measure/drawing/polyline-data';
 import { taperedElevation } from '#shared/measure/drawing/tapered-elevation';
-import { axis } from '#shared/measure/drawing/upright-figure';
+import { axis } from '#shared/measure/drawing/upright-corners';
 import type { BossShape, SolidShape, TorusShape } from '#shared/measure/solid-shape';
 
 /** A round body of two semi-axes, cut flat so far from its top and its bottom, in mm. */

@@ -3,7 +3,7 @@ import type { Point } from '#shared/geometry/point';
 import { quarterSemiAxes, type QuarterEllipse } from '#shared/geometry/quarter-ellipse';
 import type { Stroke } from '#shared/geometry/stroke';
 import type { DrawingPoint } from '#shared/measure/drawing/drawing';
-import { arcData, lineData, moveData, spot } from '#shared/measure/drawing/path-data';
+import { arcData, lineData, moveData, spot } from '#shared/measure/drawing/polyline-data';
 
 /** Where a curve drawn with y upwards lands on a drawing: as it is, or mirrored about its axis x = 0. */
 export type Hand = 'right' | 'left';

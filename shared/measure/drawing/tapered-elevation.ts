@@ -1,7 +1,7 @@
 import type { DrawingPath, DrawingView } from '#shared/measure/drawing/drawing';
 import { dimension, madeView } from '#shared/measure/drawing/made-view';
-import { polylineData, spot } from '#shared/measure/drawing/path-data';
-import { axis, closedOutline } from '#shared/measure/drawing/upright-figure';
+import { polylineData, spot } from '#shared/measure/drawing/polyline-data';
+import { axis, closedOutline } from '#shared/measure/drawing/upright-corners';
 
 /** A straight-sided elevation: widths at top and foot, height along the axis, in mm; arrises at so great a part of the half width. */
 export interface TaperedFigure {

@@ -1,9 +1,9 @@
 import { strokeReach } from '#shared/geometry/stroke';
 import type { DrawingPath, DrawingView } from '#shared/measure/drawing/drawing';
 import { boxAround, dimension, madeView } from '#shared/measure/drawing/made-view';
-import { polylineData, spot } from '#shared/measure/drawing/path-data';
+import { polylineData, spot } from '#shared/measure/drawing/polyline-data';
 import { placed, strokesData } from '#shared/measure/drawing/stroke-data';
-import { axis } from '#shared/measure/drawing/upright-figure';
+import { axis } from '#shared/measure/drawing/upright-corners';
 import { drawnStrokes, profileCurve, type ProfilePiece } from '#shared/measure/profile-curve';
 import type { TurnedShape } from '#shared/measure/turned-shape';
 

@@ -1,7 +1,7 @@
 import type { DrawingPath, DrawingPoint, DrawingView } from '#shared/measure/drawing/drawing';
 import { dimension, madeView } from '#shared/measure/drawing/made-view';
-import { polylineData, spot } from '#shared/measure/drawing/path-data';
-import { axis, closedOutline, uprightCorners } from '#shared/measure/drawing/upright-figure';
+import { polylineData, spot } from '#shared/measure/drawing/polyline-data';
+import { axis, closedOutline, uprightCorners } from '#shared/measure/drawing/upright-corners';
 import type { HelicoidShape, TwistedShape } from '#shared/measure/leg-shape';
 import { sectionOutline } from '#shared/measure/section-outline';
 

@@ -1,6 +1,6 @@
 import type { DrawingDimension, DrawingPath, DrawingPoint } from '#shared/measure/drawing/drawing';
 import { dimension } from '#shared/measure/drawing/made-view';
-import { polylineData, spot } from '#shared/measure/drawing/path-data';
+import { polylineData, spot } from '#shared/measure/drawing/polyline-data';
 
 /** The four corners of an upright rectangle with its top left at 0, 0, clockwise, in mm. */
 export const uprightCorners = (width_mm: number, height_mm: number): DrawingPoint[] => [

@@ -1,0 +1,37 @@
+import type { Opening } from '#shared/measure/opening';
+import { openingComplaints } from '#shared/measure/opening-complaints';
+import type { Shape } from '#shared/measure/shape';
+
+const panel: Shape = { kind: 'rectangle', length_mm: 200, height_mm: 150 };
+const slot = (length_mm: number, height_mm: number, count = 1): Opening => ({
+  id: 'slot',
+  shape: { kind: 'rectangle', length_mm, height_mm },
+  count,
+});
+const disc = (diameter_mm: number): Opening => ({ id: 'disc', shape: { kind: 'circle', diameter_mm }, count: 1 });
+const given = (area_mm2: number): Opening => ({
+  id: 'given',
+  shape: { kind: 'measured', area_mm2, uncertainty_mm2: 0, note: 'traced', isTrueSurface: false },
+  count: 1,
+});
+
+describe('Openings of a member', () => {
+  it.each<[string, Shape, Opening[], string[]]>([
+    ['none is no matter', panel, [], []],
+    ['some that fit', panel, [slot(50, 20, 4), disc(60)], []],
+    ['one along the diagonal, 250', panel, [slot(240, 10)], []],
+    ['one longer than the diagonal', panel, [slot(260, 10)], ['openings.0.shape: measure-opening-too-long']],
+    ['together as large as the face', panel, [given(30_000)], []],
+    ['together larger than the face', panel, [given(29_000), slot(50, 21)], ['openings: measure-openings-too-large']],
+    [
+      'a disc wider than the disc it is in',
+      { kind: 'circle', diameter_mm: 100 },
+      [disc(40), disc(101)],
+      ['openings.1.shape: measure-opening-too-long', 'openings: measure-openings-too-large'],
+    ],
+    ['one in a turned surface is asked for its area alone', { kind: 'sphere', diameter_mm: 60 }, [slot(100, 10)], []],
+  ])('%s', (_what, shape, openings, expected) => {
+    const complaints = openingComplaints(shape, openings);
+    expect(complaints.map(({ path, code }) => `${path.join('.')}: ${code}`)).toEqual(expected);
+  });
+});
