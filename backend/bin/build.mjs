@@ -36,9 +36,9 @@ function run(command, args) {
   });
 }
 
-/** Builds what has changed since it was built last. */
-export async function buildWhatChanged(say) {
-  for (const part of parts) {
+/** Builds what has changed since it was built last; seeding needs no pages. */
+export async function buildWhatChanged(say, { withPages }) {
+  for (const part of withPages ? parts : parts.slice(1)) {
     const stamp = stampOf(part.sources);
     if (existsSync(part.result) && isCurrent(part.stampFile, stamp)) continue;
     say(`Building ${part.name} …`);

@@ -34,7 +34,7 @@ async function prepare() {
   toStop.push(lockFolder(dataFolder, port));
   if (!seedsOnly && !(await isFree(port)))
     throw new Error(`Port ${port} is taken by another program. Choose another one: PORT=${port + 1} npm start`);
-  await buildWhatChanged(say);
+  await buildWhatChanged(say, { withPages: !seedsOnly });
 }
 
 /** The settings the server is started with: of the database named in the environment, else of our own. */

@@ -12,8 +12,8 @@ const server = (): string => {
 export async function freshDatabase(): Promise<string> {
   const name = `test_${process.env['JEST_WORKER_ID'] ?? '0'}`;
   const root = new Database(`${server()}/mysql`, 1);
-  await root.sequelize.query(`DROP DATABASE IF EXISTS ${name}`);
-  await root.sequelize.query(`CREATE DATABASE ${name}`);
+  await root.sequelize.getQueryInterface().dropDatabase(name);
+  await root.sequelize.getQueryInterface().createDatabase(name);
   await root.close();
   await migrate(`${server()}/${name}`, migrations);
   return `${server()}/${name}`;

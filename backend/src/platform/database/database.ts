@@ -61,8 +61,8 @@ export class Database {
 
   /** A changing statement written by hand; answers how many rows it changed. */
   async execute(sql: string, values: Record<string, unknown> = {}): Promise<number> {
-    const [, result] = await this.sequelize.query(sql, { replacements: values });
-    return (result as { affectedRows?: number } | undefined)?.affectedRows ?? 0;
+    const [result] = await this.sequelize.query(sql, { replacements: values });
+    return (result as unknown as { affectedRows?: number }).affectedRows ?? 0;
   }
 
   close(): Promise<void> {

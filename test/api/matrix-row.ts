@@ -1,0 +1,23 @@
+import type { WordCode } from '#shared/words/word-code';
+import type { Api, TestPerson, TestWorkshop } from './start-api';
+import type { Parts } from './visitor';
+
+/** What the matrix must know of one endpoint to call it: a new endpoint without its row fails. */
+export interface MatrixRow {
+  /**
+   * Makes what the call needs in a workshop and answers a valid call; texts begin with the workshop's mark. `caller` is who will
+   * call, where the endpoint needs a person of the workshop.
+   */
+  readonly prepare: (workshop: TestWorkshop, api: Api, caller: TestPerson) => Parts | Promise<Parts>;
+  /** The history a successful call leaves; `none` for calls that change nothing of a workshop. */
+  readonly history?: WordCode;
+  /** The status of a valid call, where it is neither 200 nor 204. */
+  readonly status?: number;
+  /** The call changes who the caller is, so somebody new makes it. */
+  readonly bySomebodyNew?: true;
+  /** The body names rows of the workshop, so that another workshop's must be refused as not found. Known for what stands in the path. */
+  readonly namesRows?: true;
+}
+
+/** The rows of one feature, by the names of its endpoints. */
+export type MatrixRows = Readonly<Record<string, MatrixRow>>;
