@@ -1,4 +1,4 @@
-import type { MeasuredMember } from '#shared/measure/net-areas';
+import type { ZonedMember } from '#shared/measure/zoned-member';
 import type { Finding } from '#shared/words/finding';
 
 /** What came out of a member's zones: openings of one and bare area in mm², the share taken (1 = all). */
@@ -8,7 +8,7 @@ export interface Taken {
   readonly bare_mm2: number;
 }
 
-function openingFindings({ surface, zones }: MeasuredMember, { openings_mm2 }: Taken): Finding[] {
+function openingFindings({ surface, zones }: ZonedMember, { openings_mm2 }: Taken): Finding[] {
   const { area_mm2 } = surface;
   if (openings_mm2 === 0) return [];
   if (openings_mm2 > area_mm2 * (1 + 1e-9))
@@ -18,7 +18,7 @@ function openingFindings({ surface, zones }: MeasuredMember, { openings_mm2 }: T
     .map(({ id }) => ({ kind: 'note', code: 'measure-pierced-openings', values: {}, about: id }));
 }
 
-function partFindings({ surface, zones }: MeasuredMember): Finding[] {
+function partFindings({ surface, zones }: ZonedMember): Finding[] {
   const taken = new Set<string>();
   return zones.flatMap(({ id, take }) => {
     if (take.way !== 'parts') return [];
@@ -37,7 +37,7 @@ function shareFindings({ taken, bare_mm2 }: Taken): Finding[] {
 }
 
 /** What there is to tell about a member's openings, parts and shares; areas in mm². */
-export const netAreaFindings = (member: MeasuredMember, taken: Taken): Finding[] => [
+export const netAreaFindings = (member: ZonedMember, taken: Taken): Finding[] => [
   ...openingFindings(member, taken),
   ...partFindings(member),
   ...shareFindings(taken),

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
-import { netAreas, type MeasuredMember, type MeasuredZone } from '#shared/measure/net-areas';
+import type { ZonedMember, MemberZone } from '#shared/measure/zoned-member';
+import { netAreas } from '#shared/measure/net-areas';
 import { reliefs } from '#shared/measure/relief';
 import type { Shape } from '#shared/measure/shape';
 import { startMeasure } from '#shared/measure/start-measure';
@@ -18,18 +19,18 @@ const moulding: Shape = {
   facing: 'outward',
 };
 
-const share = (share_percent: number, more: Partial<MeasuredZone> = {}): MeasuredZone => ({
+const share = (share_percent: number, more: Partial<MemberZone> = {}): MemberZone => ({
   id: `zone-${share_percent}`,
   take: { way: 'share', share_percent },
   relief: 'flat',
   ...more,
 });
-const parts = (...keys: string[]): MeasuredZone => ({
+const parts = (...keys: string[]): MemberZone => ({
   id: keys.join(),
   take: { way: 'parts', parts: keys },
   relief: 'flat',
 });
-const member = (shape: Shape, zones: readonly MeasuredZone[], more: Partial<MeasuredMember> = {}): MeasuredMember => ({
+const member = (shape: Shape, zones: readonly MemberZone[], more: Partial<ZonedMember> = {}): ZonedMember => ({
   surface: surfaceOf(shape),
   openings: [],
   count: 1,
@@ -38,12 +39,12 @@ const member = (shape: Shape, zones: readonly MeasuredZone[], more: Partial<Meas
 });
 /** A square hole of 100. */
 const hole = { id: 'hole', shape: { kind: 'rectangle', length_mm: 100, height_mm: 100 } as const, count: 1 };
-const work = (given: MeasuredMember) => netAreas(given, startMeasure);
-const codesOf = (given: MeasuredMember) => work(given).findings.map(({ kind, code }) => `${kind} ${code}`);
+const work = (given: ZonedMember) => netAreas(given, startMeasure);
+const codesOf = (given: ZonedMember) => work(given).findings.map(({ kind, code }) => `${kind} ${code}`);
 
 describe('The net area of a zone', () => {
   // A panel of 100,000 mm², worked by hand.
-  it.each<[string, MeasuredMember, number, number]>([
+  it.each<[string, ZonedMember, number, number]>([
     ['the whole of a flat panel', member(panel, [share(100)]), 100_000, 100_000],
     ['of four alike', member(panel, [share(100)], { count: 4 }), 400_000, 400_000],
     ['a quarter of it', member(panel, [share(25)]), 25_000, 25_000],
@@ -88,7 +89,7 @@ describe('The net area of a zone', () => {
   });
 
   it('names the house value it used', () => {
-    const houses = (given: MeasuredMember) => work(given).zones[0].reasons.flatMap(({ house }) => house ?? []);
+    const houses = (given: ZonedMember) => work(given).zones[0].reasons.flatMap(({ house }) => house ?? []);
     expect(houses(member(panel, [share(100, { relief: 'high' })]))).toEqual(['measure.reliefFactors.high']);
   });
 
@@ -100,7 +101,7 @@ describe('The net area of a zone', () => {
     ]);
   });
 
-  it.each<[string, MeasuredMember, string[]]>([
+  it.each<[string, ZonedMember, string[]]>([
     ['all of it taken is nothing to tell', member(panel, [share(40), share(60)]), []],
     ['thirds make a whole', member(panel, [share(100 / 3), share(100 / 3), share(100 / 3)]), []],
     ['more than all of it is refused', member(panel, [share(60), share(41)]), ['refuse measure-shares-over']],

@@ -1,30 +1,13 @@
 import { because } from '#shared/measure/made-surface';
 import type { MeasureCard } from '#shared/measure/measure-card';
+import type { ZonedMember, MemberZone } from '#shared/measure/zoned-member';
 import { netAreaFindings } from '#shared/measure/net-area-findings';
-import type { Opening } from '#shared/measure/opening';
 import { openingsArea } from '#shared/measure/openings-area';
 import type { Relief } from '#shared/measure/relief';
 import { reliefFactor } from '#shared/measure/relief-factor';
-import type { Surface } from '#shared/measure/surface';
 import { zoneShare } from '#shared/measure/zone-share';
-import type { ZoneTake } from '#shared/measure/zone-take';
 import type { Finding } from '#shared/words/finding';
 import type { Reason } from '#shared/words/reason';
-
-/** A zone as far as measuring goes. */
-export interface MeasuredZone {
-  readonly id: string;
-  readonly take: ZoneTake;
-  readonly relief: Relief;
-}
-
-/** A member with its surface, the openings of one, how many are alike, and the zones of the chosen alternative. */
-export interface MeasuredMember {
-  readonly surface: Surface;
-  readonly openings: readonly Opening[];
-  readonly count: number;
-  readonly zones: readonly MeasuredZone[];
-}
 
 /** What a zone comes to: areas in mm², of one member and of all alike; plan for hands-on work, net (with relief) for material and leaf. */
 export interface ZoneArea {
@@ -52,7 +35,7 @@ export interface NetAreas {
 }
 
 interface Field {
-  readonly member: MeasuredMember;
+  readonly member: ZonedMember;
   readonly openings_mm2: number;
   readonly card: MeasureCard;
 }
@@ -65,7 +48,7 @@ function fieldReasons({ member, openings_mm2 }: Field, relief: Relief): Reason[]
   return [developed, because('measure-openings', [openings_mm2, 'mm2'], { count })];
 }
 
-function zoneArea({ id, take, relief }: MeasuredZone, field: Field): ZoneArea {
+function zoneArea({ id, take, relief }: MemberZone, field: Field): ZoneArea {
   const { surface, count } = field.member;
   // Pierced work takes its edges into the factor, so nothing is deducted from it.
   const whole_mm2 = surface.area_mm2 - (relief === 'pierced' ? 0 : field.openings_mm2);
@@ -98,7 +81,7 @@ function zoneArea({ id, take, relief }: MeasuredZone, field: Field): ZoneArea {
  * Net areas of a member's zones in mm²: (developed − openings) × count × share × relief factor. Openings above the surface, shares
  * above 100 % and parts taken twice are refused as findings; what no zone takes stays bare and is told.
  */
-export function netAreas(member: MeasuredMember, card: MeasureCard): NetAreas {
+export function netAreas(member: ZonedMember, card: MeasureCard): NetAreas {
   const openings_mm2 = openingsArea(member.openings);
   const plan_mm2 = Math.max(0, member.surface.area_mm2 - openings_mm2) * member.count;
   const zones = member.zones.map((zone) => zoneArea(zone, { member, openings_mm2, card }));
