@@ -1,0 +1,2 @@
+export type { BenchSheetRequest } from './bench-sheet-request';
+export type { IssuePaper } from './issue-paper';
