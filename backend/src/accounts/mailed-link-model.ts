@@ -17,7 +17,7 @@ export interface MailedLinkRow {
 
 export const mailedLinkTable = (database: Database) =>
   database.table<MailedLinkRow>('mailed_links', {
-    tokenHash: { type: column.hash, primaryKey: true },
+    tokenHash: { ...column.hash, primaryKey: true },
     purpose: column.word,
     about: column.word,
     content: column.json,

@@ -1,18 +1,21 @@
 import { DataTypes } from 'sequelize';
 
-/** The kinds of column the tables have, for `database.table`. Amounts are whole minor units, instants UTC to the millisecond. */
+/**
+ * The kinds of column the tables have, for `database.table`. Amounts are whole minor units, instants UTC to the millisecond.
+ * Each may be spread: `{ ...column.word, primaryKey: true }`.
+ */
 export const column = {
   id: { type: DataTypes.CHAR(36), primaryKey: true },
   workshopId: { type: DataTypes.CHAR(36), primaryKey: true },
-  reference: DataTypes.CHAR(36),
-  hash: DataTypes.CHAR(64),
-  text: DataTypes.TEXT,
-  word: DataTypes.STRING,
-  whole: DataTypes.BIGINT,
-  minor: DataTypes.BIGINT,
-  decimal: DataTypes.DECIMAL(24, 8),
-  instant: DataTypes.DATE(3),
-  day: DataTypes.DATEONLY,
-  json: DataTypes.JSON,
-  bytes: DataTypes.BLOB('long'),
+  reference: { type: DataTypes.CHAR(36) },
+  hash: { type: DataTypes.CHAR(64) },
+  text: { type: DataTypes.TEXT },
+  word: { type: DataTypes.STRING },
+  whole: { type: DataTypes.BIGINT },
+  minor: { type: DataTypes.BIGINT },
+  decimal: { type: DataTypes.DECIMAL(24, 8) },
+  instant: { type: DataTypes.DATE(3) },
+  day: { type: DataTypes.DATEONLY },
+  json: { type: DataTypes.JSON },
+  bytes: { type: DataTypes.BLOB('long') },
 } as const;
