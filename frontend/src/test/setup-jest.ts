@@ -24,3 +24,14 @@ const noMatch = (media: string) => ({
   dispatchEvent: () => false,
 });
 globalThis.matchMedia ??= ((media: string) => noMatch(media)) as unknown as typeof matchMedia;
+
+/** jsdom's blobs cannot be read as the browser's can. */
+function text(this: Blob): Promise<string> {
+  return new Promise((resolve) => {
+    const reader = new FileReader();
+    reader.onload = () => resolve(reader.result as string);
+    reader.readAsText(this);
+  });
+}
+
+if (!('text' in Blob.prototype)) Object.defineProperty(Blob.prototype, 'text', { value: text });

@@ -14,4 +14,4 @@ export const languages: Readonly<Record<string, Language>> = {
 
 /** The first of a person's languages that there are words for, else English. */
 export const languageFor = (preferred: readonly string[]): string =>
-  preferred.map((tag) => tag.split('-')[0]).find((language) => language in languages) ?? 'en';
+  preferred.map((tag) => tag.split('-')[0]).find((language) => Object.hasOwn(languages, language)) ?? 'en';

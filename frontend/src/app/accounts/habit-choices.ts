@@ -1,3 +1,4 @@
+import { newWorkshopSchema } from '#shared/accounts/workshop-schema';
 import { currencyCodes } from '#shared/money/currency-digits';
 import { inOrder, type Choice } from './choice';
 
@@ -64,9 +65,11 @@ export function countryChoices(): readonly Choice[] {
   return inOrder(codes.flatMap((value) => (nameOf.of(value) ? [{ value, label: nameOf.of(value) ?? value }] : [])));
 }
 
+/** The currencies a workshop may keep its books in. */
 export function currencyChoices(): readonly Choice[] {
   const nameOf = names('currency');
-  return currencyCodes.map((value) => ({ value, label: `${value}, ${nameOf.of(value) ?? value}` }));
+  const accepted = currencyCodes.filter((code) => newWorkshopSchema.shape.currency.safeParse(code).success);
+  return accepted.map((value) => ({ value, label: `${value}, ${nameOf.of(value) ?? value}` }));
 }
 
 /** Locales with a figure as they write it, since that is what differs. */

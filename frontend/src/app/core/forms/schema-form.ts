@@ -76,9 +76,8 @@ export class SchemaForm<S extends z.ZodObject> {
 
   /** Sends what was entered, if it parses; true when it was taken. Complaints, ours or the server's, stand beside their entries. */
   async send(work: (value: z.output<S>) => Promise<unknown>): Promise<boolean> {
-    this.group.markAllAsTouched();
     this.loose.set([]);
-    this.show();
+    this.showAll();
     const value = this.result();
     if (value === undefined || this.sending()) return this.turnBack();
     this.sending.set(true);
@@ -105,6 +104,11 @@ export class SchemaForm<S extends z.ZodObject> {
     });
     const others = remarks.filter((remark) => !placed.includes(remark)).map(({ text }) => text);
     this.loose.set(others.length > 0 ? others : placed.length > 0 ? [] : [error.message]);
+    this.showAll();
+  }
+
+  /** Shows everything that is wrong, visited or not. */
+  showAll(): void {
     this.group.markAllAsTouched();
     this.show();
   }

@@ -23,10 +23,10 @@ import { Explanation } from './explanation';
         [attr.tabindex]="inCell() ? -1 : null"
         (click)="select(explained)"
       >
-        {{ text() }}
+        <span>{{ text() }}</span>
       </button>
     } @else {
-      {{ text() }}
+      <span>{{ text() }}</span>
     }
   `,
   styles: `

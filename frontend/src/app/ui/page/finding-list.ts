@@ -20,7 +20,7 @@ const order: readonly FindingKind[] = ['refuse', 'missing', 'warn', 'caution', '
     <ul class="plain">
       @for (line of lines(); track $index) {
         <li [class]="line.finding.kind">
-          <span class="visually-hidden">{{ line.kind }}:</span>
+          <span class="visually-hidden">{{ line.kind }}:</span>&ngsp;
           @if (linked() && line.finding.about) {
             <button type="button" (click)="chosen.emit(line.finding)">{{ line.text }}</button>
           } @else {

@@ -1,6 +1,6 @@
 const fractionAt = (text: string, sign: string): number => {
   const at = text.lastIndexOf(sign);
-  return at >= 0 && /^\d*$/.test(text.slice(at + sign.length)) ? at : -1;
+  return at >= 0 && /^\d+$/.test(text.slice(at + sign.length)) ? at : -1;
 };
 
 const fractionOf = (text: string, sign: string): string => {

@@ -5,7 +5,9 @@ export function pastedLines(text: string): string[][] {
   while (cell.lastIndex < text.length) {
     const [, quoted, plain = '', end = ''] = cell.exec(text) ?? [];
     lines.at(-1)?.push((quoted?.replaceAll('""', '"') ?? plain).trim());
-    if (end !== '\t' && cell.lastIndex < text.length) lines.push([]);
+    const isDone = cell.lastIndex >= text.length;
+    if (end === '\t' && isDone) lines.at(-1)?.push('');
+    if (end !== '\t' && !isDone) lines.push([]);
   }
   return lines;
 }

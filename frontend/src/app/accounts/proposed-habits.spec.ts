@@ -1,0 +1,43 @@
+import { newWorkshopSchema } from '#shared/accounts/workshop-schema';
+import { countryChoices, currencyChoices, localeChoices, timeZoneChoices } from './habit-choices';
+import { proposedHabits } from './proposed-habits';
+
+describe('What a new workshop is offered', () => {
+  it.each([
+    ['en-US', { country: 'US', currency: 'USD', lengthUnit: 'in', paperSize: 'Letter' }],
+    ['en-CA', { country: 'CA', currency: 'CAD', lengthUnit: 'mm', paperSize: 'Letter' }],
+    ['en-GB', { country: 'GB', currency: 'GBP', lengthUnit: 'mm', paperSize: 'A4' }],
+    ['fr', { country: 'FR', locale: 'fr-FR', currency: 'EUR', lengthUnit: 'mm' }],
+  ])('follows the browser: %s', (language, habits) => {
+    expect(proposedHabits(language)).toMatchObject(habits);
+  });
+
+  it.each(['en-US', 'pl', 'pt-BR', 'zh-Hans-CN', 'nb'])(
+    'is always something a workshop can be founded with: %s',
+    (language) => {
+      expect(newWorkshopSchema.safeParse({ name: 'Mill Yard', ...proposedHabits(language) }).success).toBe(true);
+    },
+  );
+
+  it('names present countries once, and nothing that is none', () => {
+    const codes = countryChoices().map(({ value }) => value);
+    expect(codes).toEqual(expect.arrayContaining(['IE', 'GB', 'CH', 'JP']));
+    expect(codes.filter((code) => ['EU', 'ZZ', 'UN', 'YU', 'SU'].includes(code))).toEqual([]);
+    expect(new Set(countryChoices().map(({ label }) => label)).size).toBe(codes.length);
+  });
+
+  it('offers the locale a workshop has, however rare', () => {
+    expect(localeChoices('rm-CH').map(({ value }) => value)).toContain('rm-CH');
+    expect(localeChoices('en-GB').filter(({ value }) => value === 'en-GB')).toHaveLength(1);
+  });
+
+  it('offers every choice in a form the schema takes', () => {
+    const habits = proposedHabits('en-IE');
+    const refused = [
+      ...currencyChoices().map(({ value }) => ({ ...habits, currency: value })),
+      ...timeZoneChoices().map(({ value }) => ({ ...habits, timeZone: value })),
+      ...countryChoices().map(({ value }) => ({ ...habits, country: value })),
+    ].filter((entry) => !newWorkshopSchema.safeParse({ name: 'Mill Yard', ...entry }).success);
+    expect(refused).toEqual([]);
+  });
+});
