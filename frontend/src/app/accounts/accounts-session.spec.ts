@@ -4,7 +4,7 @@ import { TestbedHarnessEnvironment } from '@angular/cdk/testing/testbed';
 import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { MatDialogHarness } from '@angular/material/dialog/testing';
-import { factsOf, signIn, words } from '../../test/signed-in';
+import { factsOf, signIn, words } from '../../test/sign-in';
 import { FreshPage } from '../core/routing/fresh-page';
 import { Session } from '../core/session/session';
 import { SESSION_PORT } from '../core/session/session-port';

@@ -59,21 +59,21 @@ const names = (type: 'currency' | 'region' | 'language') =>
 const isCurrent = (code: string): boolean => !noCountries.has(code) && new Intl.Locale(`und-${code}`).region === code;
 
 /** The countries the browser knows by name, by ISO 3166-1 code. */
-export function countryChoices(): readonly Choice[] {
+function countryChoices(): readonly Choice[] {
   const nameOf = names('region');
   const codes = letters.flatMap((first) => letters.map((second) => first + second)).filter(isCurrent);
   return inOrder(codes.flatMap((value) => (nameOf.of(value) ? [{ value, label: nameOf.of(value) ?? value }] : [])));
 }
 
 /** The currencies a workshop may keep its books in. */
-export function currencyChoices(): readonly Choice[] {
+function currencyChoices(): readonly Choice[] {
   const nameOf = names('currency');
   const accepted = currencyCodes.filter((code) => newWorkshopSchema.shape.currency.safeParse(code).success);
   return accepted.map((value) => ({ value, label: `${value}, ${nameOf.of(value) ?? value}` }));
 }
 
 /** Locales with a figure as they write it, since that is what differs. */
-export function localeChoices(present: string): readonly Choice[] {
+function localeChoices(present: string): readonly Choice[] {
   const nameOf = names('language');
   const offered = locales.includes(present) || present === '' ? locales : [...locales, present];
   const example = (locale: string) =>
@@ -81,5 +81,13 @@ export function localeChoices(present: string): readonly Choice[] {
   return inOrder(offered.map((value) => ({ value, label: `${nameOf.of(value) ?? value}: ${example(value)}` })));
 }
 
-export const timeZoneChoices = (): readonly Choice[] =>
+const timeZoneChoices = (): readonly Choice[] =>
   Intl.supportedValuesOf('timeZone').map((value) => ({ value, label: value.replaceAll('_', ' ') }));
+
+/** What a workshop may choose from; the locale it has is offered even where it is a rare one. */
+export const habitChoices = (presentLocale: string) => ({
+  countries: countryChoices(),
+  currencies: currencyChoices(),
+  locales: localeChoices(presentLocale),
+  timeZones: timeZoneChoices(),
+});

@@ -3,7 +3,7 @@ import { type FormGroup, ReactiveFormsModule } from '@angular/forms';
 import { paperSizes } from '#shared/accounts/workshop-options';
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
-import { countryChoices, currencyChoices, localeChoices, timeZoneChoices } from './habit-choices';
+import { habitChoices } from './habit-choices';
 
 /** How a workshop writes figures, days and papers: country, currency, language of figures, unit, time zone, paper. */
 @Component({
@@ -19,9 +19,6 @@ export class HabitFields {
   /** The one a workshop has, offered even where it is a rare one. */
   readonly presentLocale = input('');
 
-  protected readonly countries = countryChoices();
-  protected readonly currencies = currencyChoices();
-  protected readonly timeZones = timeZoneChoices();
   protected readonly paperSizes = paperSizes;
-  protected readonly locales = computed(() => localeChoices(this.presentLocale()));
+  protected readonly choices = computed(() => habitChoices(this.presentLocale()));
 }

@@ -2,7 +2,7 @@ import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
 import { type ComponentFixture, TestBed } from '@angular/core/testing';
 import type { Role } from '#shared/actor/role';
-import { factsOf, signIn, words } from '../../test/signed-in';
+import { factsOf, signIn, words } from '../../test/sign-in';
 import { Notices } from '../core/problems/notices';
 import { SESSION_PORT } from '../core/session/session-port';
 import { PeoplePage } from './people-page';

@@ -3,7 +3,7 @@ import { TestBed } from '@angular/core/testing';
 import { Router, provideRouter } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
 import type { Role } from '#shared/actor/role';
-import { signIn } from '../../test/signed-in';
+import { signIn } from '../../test/sign-in';
 import { firstPlace } from './first-place';
 
 @Component({ selector: 'app-test-page', changeDetection: ChangeDetectionStrategy.OnPush, template: '' })

@@ -3,7 +3,7 @@ import { HttpTestingController, provideHttpClientTesting } from '@angular/common
 import { TestBed } from '@angular/core/testing';
 import * as z from 'zod';
 import { endpoint, sameForAll } from '#shared/actor/endpoint';
-import { factsOf, signIn } from '../../../test/signed-in';
+import { factsOf, signIn } from '../../../test/sign-in';
 import { ProblemError } from '../problems/problem-error';
 import { Session } from '../session/session';
 import { SESSION_PORT, type SessionPort } from '../session/session-port';

@@ -1,5 +1,5 @@
 import { TestBed } from '@angular/core/testing';
-import { signIn, words } from '../../../test/signed-in';
+import { signIn, words } from '../../../test/sign-in';
 import { Formats } from './formats';
 import { Words } from './words';
 

@@ -3,7 +3,7 @@ import { TestBed } from '@angular/core/testing';
 import { ReactiveFormsModule } from '@angular/forms';
 import * as z from 'zod';
 import { complain } from '#shared/problems/complaints-of';
-import { words } from '../../../test/signed-in';
+import { words } from '../../../test/sign-in';
 import { ProblemError } from '../problems/problem-error';
 import { schemaForm } from './schema-form';
 

@@ -2,7 +2,7 @@ import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { Router, provideRouter } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
-import { factsOf, signIn } from '../../../test/signed-in';
+import { factsOf, signIn } from '../../../test/sign-in';
 import { roleGuard } from './role-guard';
 import { Session } from './session';
 import { signedInGuard } from './signed-in-guard';

@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, type Type } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { FormControl, ReactiveFormsModule } from '@angular/forms';
-import { signIn, words } from '../../../test/signed-in';
+import { signIn, words } from '../../../test/sign-in';
 import { DecimalField } from './decimal-field';
 import { LengthField } from './length-field';
 import { NumberField } from './number-field';

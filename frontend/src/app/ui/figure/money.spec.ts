@@ -1,6 +1,6 @@
 import { inputBinding } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
-import { signIn, words } from '../../../test/signed-in';
+import { signIn, words } from '../../../test/sign-in';
 import { Money } from './money';
 
 describe('Money', () => {

@@ -1,6 +1,6 @@
 import { inputBinding, outputBinding, signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
-import { signIn, words } from '../../../test/signed-in';
+import { signIn, words } from '../../../test/sign-in';
 import type { Explained } from './explained';
 import { Explanation } from './explanation';
 import { Figure } from './figure';

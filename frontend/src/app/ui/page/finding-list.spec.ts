@@ -1,7 +1,7 @@
 import { inputBinding, outputBinding } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import type { Finding } from '#shared/words/finding';
-import { signIn, words } from '../../../test/signed-in';
+import { signIn, words } from '../../../test/sign-in';
 import { FindingList } from './finding-list';
 
 const findings: readonly Finding[] = [

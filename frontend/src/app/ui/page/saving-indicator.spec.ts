@@ -1,5 +1,5 @@
 import { TestBed } from '@angular/core/testing';
-import { words, signIn } from '../../../test/signed-in';
+import { words, signIn } from '../../../test/sign-in';
 import { SavingIndicator } from './saving-indicator';
 import { NOW } from '../../core/now';
 import { Saving } from '../../core/saving/saving';

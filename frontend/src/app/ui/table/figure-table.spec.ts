@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, signal } from '@angular/core';
 import { type ComponentFixture, TestBed } from '@angular/core/testing';
-import { signIn, words } from '../../../test/signed-in';
+import { signIn, words } from '../../../test/sign-in';
 import { Explanation } from '../figure/explanation';
 import type { EditedCell, FigureColumn, PastedCells } from './figure-column';
 import { FigureTable } from './figure-table';
