@@ -23,3 +23,14 @@ export function priceFactor(profit: { readonly way: 'margin' | 'mark-up'; readon
   const markUp = profit.way === 'margin' ? markUpOfMargin(profit.percent) : new D(profit.percent);
   return markUp.div(100).plus(1);
 }
+
+/**
+ * The price of a cost: cost ÷ (1 − margin), or cost × (1 + mark-up), any unit. The margin divides last: a factor cut off at 40 digits
+ * would leave an exact half a hair below itself, and round it down. RangeError as above.
+ */
+export function priceOfCost(cost: D, profit: { readonly way: 'margin' | 'mark-up'; readonly percent: DecimalText }): D {
+  if (profit.way === 'mark-up') return cost.times(priceFactor(profit));
+  const kept = hundred.minus(profit.percent);
+  if (kept.lessThanOrEqualTo(0)) throw new RangeError('a margin must be below 100 %');
+  return cost.times(100).div(kept);
+}

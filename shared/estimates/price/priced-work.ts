@@ -1,7 +1,7 @@
 import { directOf, hoursOf, labourOf, type LineWork } from '#shared/estimates/price/line-work';
 import type { PriceInput } from '#shared/estimates/price/price-input';
 import { D, type MinorUnits } from '#shared/money/decimal';
-import { priceFactor } from '#shared/money/margin';
+import { priceOfCost } from '#shared/money/margin';
 import { exactMinor } from '#shared/money/minor-of';
 import { roundMinor } from '#shared/money/round-minor';
 
@@ -36,7 +36,7 @@ function overheadOf(line: LineWork, { card: { overhead }, digits }: PriceInput):
 /** A line with its price, given its contingency; a line with a price of its own keeps it. Unrounded minor units in. */
 export function pricedWork(work: LineWork, contingency: D, input: PriceInput): PricedWork {
   const [direct, overhead] = [directOf(work), overheadOf(work, input)];
-  const worked = direct.plus(overhead).plus(contingency).times(priceFactor(input.profit));
+  const worked = priceOfCost(direct.plus(overhead).plus(contingency), input.profit);
   const unrounded = work.price_minor === null ? worked : new D(work.price_minor);
   return { work, direct, overhead, contingency, unrounded, price_minor: roundMinor(unrounded) };
 }

@@ -1,6 +1,6 @@
 import { type GradeHours, labourItems } from '#shared/estimates/price/labour-items';
 import { boughtItem, type CostItem, directOf, hoursOf, type LineWork } from '#shared/estimates/price/line-work';
-import type { PriceGoods, PriceInput } from '#shared/estimates/price/price-input';
+import type { GoodsShare, PriceGoods, PriceInput } from '#shared/estimates/price/price-input';
 import { type WorkKind, workKinds } from '#shared/estimates/price/work-kind';
 import { D } from '#shared/money/decimal';
 import { minorOf } from '#shared/money/minor-of';
@@ -20,11 +20,20 @@ type PlaceFor = (place: Place) => Gathered;
 
 const idOf = ({ memberId, kind }: Place): string => `${memberId ?? 'general'}/${kind}`;
 
+/** What goes to one line is weighed together, so that each line is within one minor unit of its exact share. */
+export function sharesByLine(goods: Pick<PriceGoods, 'shares'>): GoodsShare[] {
+  const lines = new Map<string, GoodsShare>();
+  for (const share of goods.shares.filter(({ weight }) => weight > 0)) {
+    const weight = (lines.get(idOf(share))?.weight ?? 0) + share.weight;
+    lines.set(idOf(share), { ...share, weight });
+  }
+  return lines.size > 0 ? [...lines.values()] : [{ memberId: null, kind: 'other', weight: 1 }];
+}
+
 /** What is bought once for the job is bought in whole booklets or packs: that total comes first and is shared out to the minor unit. */
 function shareOut(goods: PriceGoods, digits: number, placeFor: PlaceFor): void {
   const total = minorOf(goods.cost, digits);
-  const used = goods.shares.filter((share) => share.weight > 0);
-  const shares = used.length > 0 ? used : [{ memberId: null, kind: 'other' as const, weight: 1 }];
+  const shares = sharesByLine(goods);
   const parts = splitByLargestRemainder(
     total,
     shares.map((share) => share.weight),
