@@ -41,7 +41,9 @@ export const jobs = migration('0020-jobs', [
     UNIQUE KEY jobs_by_number (workshop_id, year, ordinal),
     KEY jobs_by_change (workshop_id, changed_at, id),
     KEY jobs_by_title (workshop_id, title, id),
-    KEY jobs_by_state (workshop_id, state, changed_at, id),
+    KEY jobs_by_state_and_number (workshop_id, state, year, ordinal),
+    KEY jobs_by_state_and_change (workshop_id, state, changed_at, id),
+    KEY jobs_by_state_and_title (workshop_id, state, title, id),
     KEY jobs_of_client (workshop_id, client_id, changed_at, id),
     CONSTRAINT jobs_of_workshop FOREIGN KEY (workshop_id) REFERENCES workshops (id),
     CONSTRAINT jobs_for_client FOREIGN KEY (workshop_id, client_id) REFERENCES clients (workshop_id, id)

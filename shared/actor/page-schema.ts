@@ -2,7 +2,7 @@ import * as z from 'zod';
 
 /** The query every list understands: a page size, and where the page before it ended. */
 export const pageQuery = {
-  cursor: z.string().max(300).optional(),
+  cursor: z.string().max(700).optional(),
   limit: z.coerce.number().int().min(1).max(100).default(50),
 };
 

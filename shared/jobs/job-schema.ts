@@ -5,6 +5,9 @@ import { identifier, line, optionalLine, paragraphs } from '#shared/problems/ent
 export const jobStates = ['open', 'sent', 'accepted', 'declined', 'finished'] as const;
 export type JobState = (typeof jobStates)[number];
 
+/** Where the issues of a job have brought it; what is finished goes back to it when it is taken up again. */
+export type ReachedState = Exclude<JobState, 'finished'>;
+
 /** Whether the base is made or an old one is worked on: an old one brings its own cautions. */
 export const jobKinds = ['new', 'restoration'] as const;
 
@@ -29,5 +32,6 @@ export const jobSchema = jobContentSchema.extend({
 });
 export type Job = z.infer<typeof jobSchema>;
 
-/** The orders a list of jobs can stand in. */
+/** The orders a list of jobs can stand in: the last changed first, the newest number first, or by title. */
 export const jobOrders = ['changed', 'number', 'title'] as const;
+export type JobOrder = (typeof jobOrders)[number];

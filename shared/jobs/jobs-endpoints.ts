@@ -8,7 +8,7 @@ const oneJob = z.strictObject({ jobId: identifier });
 
 export const listJobs = endpoint({
   name: 'listJobs',
-  summary: 'Jobs, found by the beginnings of words in title, number, client, reference and site',
+  summary: 'Jobs, found by the beginnings of words in title, number, client, reference and site.',
   method: 'get',
   path: '/api/jobs',
   callers: ['owner', 'estimator', 'office', 'bench'],
@@ -24,7 +24,7 @@ export const listJobs = endpoint({
 
 export const readJob = endpoint({
   name: 'readJob',
-  summary: 'One job with its client',
+  summary: 'One job with its client.',
   method: 'get',
   path: '/api/jobs/:jobId',
   callers: ['owner', 'estimator', 'office', 'bench'],
@@ -34,7 +34,7 @@ export const readJob = endpoint({
 
 export const keepJob = endpoint({
   name: 'keepJob',
-  summary: 'Open or change a job; the browser makes the id, a first entry carries version 0 and is given its number',
+  summary: 'Open or change a job; the browser makes the id, a first entry carries version 0 and is given its number.',
   method: 'put',
   path: '/api/jobs/:jobId',
   callers: ['owner', 'estimator', 'office'],
@@ -44,15 +44,25 @@ export const keepJob = endpoint({
   answers: sameForPriced(jobSchema),
 });
 
+export const finishJob = endpoint({
+  name: 'finishJob',
+  summary: 'Put a job away as finished, or take it up again where its issues have brought it.',
+  method: 'put',
+  path: '/api/jobs/:jobId/finished',
+  callers: ['owner', 'estimator', 'office'],
+  params: oneJob,
+  body: z.strictObject({ isFinished: z.boolean() }),
+  versioned: true,
+  answers: sameForPriced(jobSchema),
+});
+
 export const removeJob = endpoint({
   name: 'removeJob',
-  summary: 'Remove a job of which nothing was issued',
+  summary: 'Remove a job of which nothing was issued.',
   method: 'delete',
   path: '/api/jobs/:jobId',
   callers: ['owner', 'estimator'],
   params: oneJob,
   versioned: true,
-  answers: sameForPriced(z.strictObject({})),
+  answers: {},
 });
-
-export const jobsEndpoints = [listJobs, readJob, keepJob, removeJob] as const;

@@ -43,9 +43,13 @@ export class Database {
     repairSequelize(this.sequelize);
   }
 
-  /** Describes a table to Sequelize; the table itself is made by a migration. */
+  /** Describes a table to Sequelize, which writes the names of the columns into what it is given: so each gets a copy of its kind. */
   table<R extends Row>(name: string, columns: ModelAttributes<Model<R, R>, R>): Table<R> {
-    return this.sequelize.define<Model<R, R>, R>(name, columns);
+    const own = Object.entries<object | string>(columns).map(([field, kind]) => [
+      field,
+      typeof kind === 'object' ? { ...kind } : kind,
+    ]);
+    return this.sequelize.define<Model<R, R>, R>(name, Object.fromEntries(own) as typeof columns);
   }
 
   /** All or nothing, repeated when the database asks for it: so the work must have no effect but on the database. */

@@ -27,7 +27,7 @@ export interface Page<R> {
   readonly countIsExact: boolean;
 }
 
-const countLimit = 1_000;
+export const countLimit = 1_000;
 
 interface Listing<R> {
   readonly where?: WhereOptions<R>;
@@ -51,12 +51,18 @@ export class WorkshopRows<R extends WorkshopRow> {
     return row;
   }
 
-  /** The row, held against others until the transaction ends. */
-  async lock(workshopId: string, id: string): Promise<R> {
+  /** The row if there is one, held against others until the transaction ends. */
+  async hold(workshopId: string, id: string): Promise<R | undefined> {
     const where = { workshopId, id } as WhereOptions<R>;
     const row = await this.table.findOne({ where, raw: true, lock: true });
+    return (row as unknown as R | null) ?? undefined;
+  }
+
+  /** The row, held against others until the transaction ends; refused as not found like `get`. */
+  async lock(workshopId: string, id: string): Promise<R> {
+    const row = await this.hold(workshopId, id);
     if (!row) throw new Rejection('not-found', 'problem-not-found');
-    return row as unknown as R;
+    return row;
   }
 
   async list(workshopId: string, listing: Listing<R> = {}): Promise<R[]> {
@@ -103,7 +109,8 @@ export class WorkshopRows<R extends WorkshopRow> {
     return current;
   }
 
-  private async countTo(workshopId: string, where: WhereOptions<R>): Promise<number> {
+  /** How many rows there are, counted to one more than 1,000. */
+  protected async countTo(workshopId: string, where: WhereOptions<R>): Promise<number> {
     const own = { [Op.and]: [{ workshopId }, where] } as WhereOptions<R>;
     const rows = await this.table.findAll({ attributes: ['id'], where: own, limit: countLimit + 1, raw: true });
     return rows.length;

@@ -1,0 +1,43 @@
+import { Op, type WhereOptions } from 'sequelize';
+import * as z from 'zod';
+import type { Database } from '../platform/database/database';
+import { ListedRows, type ListOrder } from '../platform/database/listed-rows';
+import { SearchWords } from '../platform/database/search-words';
+import type { Page, PageAsked } from '../platform/database/workshop-rows';
+import { clientTable, type ClientRow } from './client-model';
+
+const byName: ListOrder<ClientRow> = {
+  columns: ['name', 'id'],
+  direction: 'ASC',
+  cursor: z.tuple([z.string(), z.uuid()]),
+};
+
+export class ClientRepository extends ListedRows<ClientRow> {
+  constructor(database: Database) {
+    super(clientTable(database), new SearchWords(database, 'client'));
+  }
+
+  pageByName(workshopId: string, asked: PageAsked & { search: string }): Promise<Page<ClientRow>> {
+    return this.pageInOrder(workshopId, { ...asked, order: byName });
+  }
+
+  /** What these clients are called, by their ids. */
+  async names(workshopId: string, ids: readonly string[]): Promise<ReadonlyMap<string, string>> {
+    const where: WhereOptions<ClientRow> = { workshopId, id: { [Op.in]: [...new Set(ids)] } };
+    const rows = await this.table.findAll({ attributes: ['id', 'name'], where, raw: true });
+    return new Map((rows as unknown as Pick<ClientRow, 'id' | 'name'>[]).map(({ id, name }) => [id, name]));
+  }
+
+  async countJobs(workshopId: string, id: string, by: 1 | -1): Promise<void> {
+    await this.table.increment('jobs', { by, where: { workshopId, id } as WhereOptions<ClientRow> });
+  }
+
+  /** Writes down the words by which the client is found. */
+  writeWords(workshopId: string, { id, name, contact, email, telephone }: ClientRow): Promise<void> {
+    return this.words.write(workshopId, [{ id, text: [name, contact, email, telephone].join(' ') }]);
+  }
+
+  removeWords(workshopId: string, id: string): Promise<void> {
+    return this.words.remove(workshopId, [id]);
+  }
+}
