@@ -3,6 +3,7 @@ import type { Audit } from '../audit';
 import type { Route } from '../platform/http/mount';
 import type { Platform } from '../platform/platform';
 import { RateCardRepository } from './rate-card-repository';
+import { rateCardRoutes } from './rate-card-routes';
 import { RateCardService } from './rate-card-service';
 
 export type { RateCardRow } from './rate-card-model';
@@ -21,5 +22,5 @@ export function openRateCards({ database, clock }: Platform, accounts: Accounts,
     audit: audit.service,
     clock,
   });
-  return { service, routes: [] };
+  return { service, routes: rateCardRoutes(service) };
 }

@@ -6,7 +6,9 @@ import { Rejection } from '#shared/problems/rejection';
 import type { WorkshopService } from '../accounts';
 import type { AuditService, Doer } from '../audit';
 import type { Clock } from '../platform/clock/clock';
-import type { RateCardRow } from './rate-card-model';
+import type { Page, PageAsked } from '../platform/database/workshop-rows';
+import type { RateCardHead, RateCardRow } from './rate-card-model';
+import type { CardsToday } from './rate-card-presenter';
 import type { RateCardRepository } from './rate-card-repository';
 
 interface Parts {
@@ -29,6 +31,16 @@ export class RateCardService {
   async today(workshopId: string): Promise<string> {
     const { timeZone } = await this.parts.workshops.get(workshopId);
     return dayOfInstant(this.parts.clock.now().getTime(), timeZone);
+  }
+
+  /** Which card the workshop works with today. */
+  async cardsToday(workshopId: string): Promise<CardsToday> {
+    const day = await this.today(workshopId);
+    return { day, inForceId: (await this.parts.cards.headInForce(workshopId, day))?.id ?? null };
+  }
+
+  page(workshopId: string, asked: PageAsked): Promise<Page<RateCardHead>> {
+    return this.parts.cards.pageOfHeads(workshopId, asked);
   }
 
   async inForce(workshopId: string): Promise<RateCardRow> {
@@ -56,6 +68,6 @@ export class RateCardService {
       content: startCard,
       changedAt: this.parts.clock.now(),
     });
-    await this.parts.audit.record(by, { subject: { kind: 'rate-card', id }, code: 'audit-rate-card-planted' });
+    await this.parts.audit.record(by, { subject: { kind: 'rate-card', id }, code: 'history-rate-card-planted' });
   }
 }

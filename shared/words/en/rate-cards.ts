@@ -8,5 +8,5 @@ export const rateCards = {
   'card-leaf-unknown': 'The rate card has no such leaf.',
   'card-timber-unknown': 'The rate card has no such timber.',
   'rate-card-none-in-force': 'No rate card is in force today.',
-  'audit-rate-card-planted': 'The start rate card was put in force',
+  'history-rate-card-planted': 'The start rate card was put in force',
 } as const;
