@@ -1,6 +1,19 @@
 import type { Migration } from '../src/platform/database/migration';
 import { platform } from './0001-platform';
 import { accounts } from './0002-accounts';
+import { numbersAndWords } from './0003-numbers-and-words';
+import { rateCards } from './0010-rate-cards';
+import { cardEffects } from './0011-card-effects';
+import { jobs } from './0020-jobs';
+import { estimates } from './0030-estimates';
 
 /** Every step of the schema, in the order in which they are taken. A step that was released is never changed. */
-export const migrations: readonly Migration[] = [platform, accounts];
+export const migrations: readonly Migration[] = [
+  platform,
+  accounts,
+  numbersAndWords,
+  rateCards,
+  cardEffects,
+  jobs,
+  estimates,
+];

@@ -1,23 +1,44 @@
 import { openAccounts, type Accounts } from './accounts';
 import { openAudit, type Audit } from './audit';
+import { openEstimates, type Estimates, type PaperMaker } from './estimates';
+import { openJobs, type Jobs } from './jobs';
 import { openWebServer, type WebServer } from './platform/http/web-server';
 import type { MailCatcher } from './platform/mail/mail-catcher';
 import type { Platform } from './platform/platform';
+import { openRateCards, type RateCards } from './rate-cards';
 
 export interface App {
   readonly audit: Audit;
   readonly accounts: Accounts;
+  readonly rateCards: RateCards;
+  readonly jobs: Jobs;
+  readonly estimates: Estimates;
   readonly web: WebServer;
   /** Clears away what has had its time: sessions, keys, links, files that no row names. */
   readonly sweep: () => Promise<void>;
 }
 
+/** Who makes the papers of issues. */
+const papers: PaperMaker = {
+  issuePapers: () => Promise.resolve([]),
+  benchSheet: () => Promise.resolve(Buffer.alloc(0)),
+};
+
 /** Joins the features: each is given what stands before it in the list, and brings its routes. */
 export function openApp(platform: Platform, catcher?: MailCatcher): App {
   const audit = openAudit(platform);
   const accounts = openAccounts(platform, audit);
-  const routes = [...audit.routes, ...accounts.routes];
+  const rateCards = openRateCards(platform, {
+    ...{ accounts, audit },
+    effects: (asked, tell) => estimates.cardEffects(asked, tell),
+  });
+  const jobs = openJobs(platform, {
+    ...{ audit, accounts },
+    hasIssues: (workshopId, jobId) => estimates.hasIssues(workshopId, jobId),
+  });
+  const estimates: Estimates = openEstimates(platform, { accounts, audit, rateCards, jobs, papers });
+  const routes = [...audit.routes, ...accounts.routes, ...rateCards.routes, ...jobs.routes, ...estimates.routes];
   const web = openWebServer(platform, { routes, identities: accounts.identities, isPage: () => true, catcher });
   const sweep = async () => void (await Promise.all([web.sweep(), accounts.sweep(), platform.files.sweep()]));
-  return { audit, accounts, web, sweep };
+  return { audit, accounts, rateCards, jobs, estimates, web, sweep };
 }

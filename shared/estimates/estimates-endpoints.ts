@@ -77,12 +77,3 @@ export const tellPresence = endpoint({
   params: oneEstimate,
   answers: sameForAll(presenceSchema),
 });
-
-export const estimatesEndpoints = [
-  listEstimates,
-  beginEstimate,
-  readEstimate,
-  changeEstimate,
-  takeRateCard,
-  tellPresence,
-] as const;

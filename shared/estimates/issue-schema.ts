@@ -1,5 +1,7 @@
 import * as z from 'zod';
-import { day, line, paragraphs } from '#shared/problems/entry-schema';
+import type { LineDifference } from '#shared/estimates/line-differences';
+import { workKinds } from '#shared/estimates/price/work-kind';
+import { day, paragraphs } from '#shared/problems/entry-schema';
 
 /** Where an issue stands with the client; only sent, accepted and declined are marked by hand. */
 export const issueStates = ['issued', 'sent', 'accepted', 'declined', 'replaced'] as const;
@@ -45,10 +47,12 @@ export type PricedIssueSummary = z.infer<typeof pricedIssueSummarySchema>;
 /** A line in which two issues (or an issue and the draft) differ. */
 export const lineDifferenceSchema = z.strictObject({
   lineId: z.string(),
-  name: z.string(),
+  member: z.string().nullable(),
+  kind: z.enum(workKinds),
+  name: z.string().nullable(),
   before_minor: z.int().nullable(),
   after_minor: z.int().nullable(),
-});
+}) satisfies z.ZodType<LineDifference>;
 
 /** The papers of an issue; those with prices are not for the bench. */
 export const papers = ['estimate.pdf', 'estimate.xlsx', 'leaf-order.pdf', 'leaf-order.csv'] as const;

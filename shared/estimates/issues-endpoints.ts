@@ -93,13 +93,3 @@ export const readBenchSheet = endpoint({
   media: 'application/pdf',
   answers: { cost: z.unknown(), price: z.unknown(), bench: z.unknown() },
 });
-
-export const issuesEndpoints = [
-  listIssues,
-  issueEstimate,
-  readDifferences,
-  readIssue,
-  markIssue,
-  readPaper,
-  readBenchSheet,
-] as const;

@@ -2,6 +2,7 @@ import * as z from 'zod';
 import { ornamentUseSchema } from '#shared/carving/ornament-use-schema';
 import type { MemberContent, PieceContent } from '#shared/estimates/member';
 import { finishes, reliefs } from '#shared/measure/relief';
+import { openingComplaints } from '#shared/measure/opening-complaints';
 import { openingSchema } from '#shared/measure/opening-schema';
 import { shapeSchema } from '#shared/measure/shape-schema';
 import { zoneTakeSchema } from '#shared/measure/zone-take-schema';
@@ -40,8 +41,8 @@ const sharesFit = (zones: readonly z.infer<typeof zoneSchema>[]) =>
     .reduce((sum, zone) => sum + (zone.take.way === 'share' ? zone.take.share_percent : 0), 0) <=
   100 + 1e-9;
 
-/** A member as it is entered; shares of its base zones come to 100 % at most. */
-export const memberContentSchema = z.strictObject({
+/** The entries of a member; shares of its base zones come to 100 % at most. */
+const memberFields = z.strictObject({
   pieceId: identifier,
   place: z.number().min(-1e9).max(1e9),
   name: line(80),
@@ -57,7 +58,15 @@ export const memberContentSchema = z.strictObject({
     .record(z.string().max(120), z.string().max(60))
     .refine((typed) => Object.keys(typed).length <= 400, complain('entry-too-many', { maximum: 400 })),
   alternativeId: identifier.nullable(),
-}) satisfies z.ZodType<MemberContent>;
+});
+
+function complainOfOpenings({ value, issues }: z.core.ParsePayload<MemberContent>): void {
+  for (const { path, code, values } of openingComplaints(value.shape, value.openings))
+    issues.push({ code: 'custom', input: value, path: [...path], params: { code, values }, message: code });
+}
+
+/** A member as it is entered; openings lie within its shape. */
+export const memberContentSchema = memberFields.check(complainOfOpenings) satisfies z.ZodType<MemberContent>;
 
 export const pieceContentSchema = z.strictObject({
   name: line(120),

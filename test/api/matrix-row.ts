@@ -11,6 +11,8 @@ export interface MatrixRow {
   readonly prepare: (workshop: TestWorkshop, api: Api, caller: TestPerson) => Parts | Promise<Parts>;
   /** The history a successful call leaves; `none` for calls that change nothing of a workshop. */
   readonly history?: WordCode;
+  /** How many entries of history it leaves, where it is not one. */
+  readonly entries?: number;
   /** The status of a valid call, where it is neither 200 nor 204. */
   readonly status?: number;
   /** The call changes who the caller is, so somebody new makes it. */

@@ -36,12 +36,14 @@ export interface Api {
   stop(): Promise<void>;
 }
 
+type Environment = Readonly<Record<string, string>>;
+
 const settings = {
   SESSION_SECRET: 'a secret that only the tests know, of no use elsewhere',
   REQUESTS_PER_MINUTE: '1000000',
 };
 
-async function openParts(environment: Readonly<Record<string, string>>) {
+async function openParts(environment: Environment) {
   const folder = await mkdtemp(join(tmpdir(), 'bolewright-api-'));
   const places = { DATABASE_URL: await freshDatabase(), DATA_DIR: folder, WEB_DIR: join(folder, 'web') };
   const config = readConfig({ ...settings, ...places, ...environment });
@@ -58,19 +60,19 @@ async function openParts(environment: Readonly<Record<string, string>>) {
   return { platform, clock, logLines, catcher, app: openApp(platform, catcher), stop };
 }
 
-/** Starts it; `environment` overrides settings. */
-export async function startApi(environment: Readonly<Record<string, string>> = {}): Promise<Api> {
+/** Starts it; `environment` overrides settings, `headers` go with all that the signed-in people ask. */
+export async function startApi(environment: Environment = {}, headers: Environment = {}): Promise<Api> {
   const { catcher, ...parts } = await openParts(environment);
   const { app, platform } = parts;
-  const ours = await openWorkshop(app, platform, 'Herons');
-  const theirs = await openWorkshop(app, platform, canary);
+  const ours = await openWorkshop({ app, platform, headers }, 'Herons');
+  const theirs = await openWorkshop({ app, platform, headers }, canary);
   return {
     ...parts,
     ours,
     theirs,
     as: (role) => ours.people[role].visitor,
-    newcomer: (workshop, role) => addPerson(app, platform, { workshop, role }),
-    stranger: (headers) => new Visitor(app.web.express, headers).arrive(),
+    newcomer: (workshop, role) => addPerson({ app, platform, headers }, { workshop, role }),
+    stranger: (own) => new Visitor(app.web.express, own ?? headers).arrive(),
     mails: async () => {
       await platform.tasks.runDue();
       return catcher.mails();

@@ -33,6 +33,13 @@ export const foundingSettings = {
   country: 'AT',
 } as const;
 
+/** The server people are added to, and what their requests carry. */
+export interface Door {
+  readonly app: App;
+  readonly platform: Platform;
+  readonly headers: Readonly<Record<string, string>>;
+}
+
 interface Place {
   readonly id: string;
   readonly mark: string;
@@ -49,8 +56,8 @@ async function welcome(app: App, mark: string, name: string) {
   return { accountId: account.id, name: account.name, email };
 }
 
-async function signedIn(app: App, person: { actor: Actor; email: string }): Promise<TestPerson> {
-  const visitor = new Visitor(app.web.express);
+async function signedIn({ app, headers }: Door, person: { actor: Actor; email: string }): Promise<TestPerson> {
+  const visitor = new Visitor(app.web.express, headers);
   const response = await visitor.signIn(person.email, password);
   if (response.status !== 200)
     throw new Error(`${person.email} could not sign in: ${response.status} ${response.text}`);
@@ -58,21 +65,18 @@ async function signedIn(app: App, person: { actor: Actor; email: string }): Prom
 }
 
 /** Adds somebody to a workshop and signs them in. */
-export async function addPerson(
-  app: App,
-  platform: Platform,
-  to: { workshop: Place; role: Role; name?: string },
-): Promise<TestPerson> {
+export async function addPerson(door: Door, to: { workshop: Place; role: Role; name?: string }): Promise<TestPerson> {
   const { workshop, role, name = `${role}-${randomUUID().slice(0, 8)}` } = to;
+  const { app, platform } = door;
   const actor = await platform.database.transaction(async () => {
     const { email, ...person } = await welcome(app, workshop.mark, name);
     const membershipId = await app.accounts.workshops.join(workshop.id, { ...person, roles: [role] });
     return { email, actor: { ...person, membershipId, workshopId: workshop.id, roles: [role] } };
   });
-  return signedIn(app, actor);
+  return signedIn(door, actor);
 }
 
-async function found(app: App, platform: Platform, mark: string) {
+async function found({ app, platform }: Door, mark: string) {
   return platform.database.transaction(async () => {
     const { email, ...owner } = await welcome(app, mark, 'owner');
     const id = await app.accounts.workshops.found(owner, { name: nameOf(mark), ...foundingSettings });
@@ -82,11 +86,11 @@ async function found(app: App, platform: Platform, mark: string) {
   });
 }
 
-export async function openWorkshop(app: App, platform: Platform, mark: string): Promise<TestWorkshop> {
-  const { owner, ...workshop } = await found(app, platform, mark);
-  const people: Partial<Record<Role, TestPerson>> = { owner: await signedIn(app, owner) };
+export async function openWorkshop(door: Door, mark: string): Promise<TestWorkshop> {
+  const { owner, ...workshop } = await found(door, mark);
+  const people: Partial<Record<Role, TestPerson>> = { owner: await signedIn(door, owner) };
   for (const role of roles.filter((one) => one !== 'owner')) {
-    people[role] = await addPerson(app, platform, { workshop, role, name: role });
+    people[role] = await addPerson(door, { workshop, role, name: role });
   }
   return { ...workshop, people: people as Record<Role, TestPerson> };
 }

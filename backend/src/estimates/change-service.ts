@@ -20,9 +20,13 @@ const order = ({ change }: PlannedChange): number => {
 };
 
 const codes = {
-  member: { made: 'audit-member-made', changed: 'audit-member-changed', removed: 'audit-member-removed' },
-  piece: { made: 'audit-piece-made', changed: 'audit-piece-changed', removed: 'audit-piece-removed' },
-  settings: { made: 'audit-settings-changed', changed: 'audit-settings-changed', removed: 'audit-settings-changed' },
+  member: { made: 'history-member-made', changed: 'history-member-changed', removed: 'history-member-removed' },
+  piece: { made: 'history-piece-made', changed: 'history-piece-changed', removed: 'history-piece-removed' },
+  settings: {
+    made: 'history-settings-changed',
+    changed: 'history-settings-changed',
+    removed: 'history-settings-changed',
+  },
 } as const satisfies Record<Change['kind'], Record<string, WordCode>>;
 
 function deedOf({ change, before }: PlannedChange): 'made' | 'changed' | 'removed' {

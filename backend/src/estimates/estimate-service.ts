@@ -3,13 +3,15 @@ import { v7 as newId } from 'uuid';
 import type { Actor } from '#shared/actor/actor';
 import { audienceOf } from '#shared/actor/role';
 import type { Change } from '#shared/estimates/change-schema';
+import type { Draft } from '#shared/estimates/draft';
+import { draftInOrder } from '#shared/estimates/draft-in-order';
 import type { CostedEstimate, KeptChanges } from '#shared/estimates/estimate-schema';
 import type { Figures } from '#shared/estimates/figures';
 import { startSettings } from '#shared/estimates/start-settings';
 import { Rejection } from '#shared/problems/rejection';
 import type { WorkshopService } from '../accounts';
 import type { AuditService } from '../audit';
-import type { JobService } from '../jobs';
+import { jobNumber, type Jobs } from '../jobs';
 import type { Clock } from '../platform/clock/clock';
 import type { PreparedAnswer } from '../platform/http/answer';
 import type { RateCardService } from '../rate-cards';
@@ -30,7 +32,7 @@ export interface EstimateParts {
   readonly readings: ReadingService;
   readonly changes: ChangeService;
   readonly cards: RateCardService;
-  readonly jobs: JobService;
+  readonly jobs: Pick<Jobs, 'job' | 'client' | 'markState' | 'touch'>;
   readonly workshops: WorkshopService;
   readonly audit: AuditService;
   readonly clock: Clock;
@@ -41,14 +43,16 @@ export class EstimateService {
   constructor(private readonly parts: EstimateParts) {}
 
   async ofJob(workshopId: string, jobId: string): Promise<EstimateRow[]> {
-    await this.parts.jobs.get(workshopId, jobId);
+    await this.parts.jobs.job(workshopId, jobId);
     return this.parts.estimates.ofJob(workshopId, jobId);
   }
 
   /** Begins an estimate on the card in force; the same id again finds what was begun. */
   async begin(actor: Actor, at: { jobId: string; id: string }, title: string): Promise<EstimateRow> {
     const { workshopId } = actor;
-    const job = await this.parts.jobs.lock(workshopId, at.jobId);
+    // Touching the job holds its row, so that two estimates begun at once are numbered one after the other.
+    const job = await this.parts.jobs.job(workshopId, at.jobId);
+    await this.parts.jobs.touch(workshopId, at.jobId);
     const known = await this.parts.estimates.find(workshopId, at.id);
     if (known) return this.sameJob(known, at.jobId);
     const card = await this.parts.cards.inForce(workshopId);
@@ -59,7 +63,7 @@ export class EstimateService {
     const row = await this.parts.estimates.insert(workshopId, {
       id: at.id,
       jobId: at.jobId,
-      number: `${job.number}-${earlier.length + 1}`,
+      number: `${jobNumber(job)}-${earlier.length + 1}`,
       version: 1,
       rateCardId: card.id,
       currency,
@@ -73,7 +77,7 @@ export class EstimateService {
     await this.parts.audit.record(actor, {
       subject,
       jobId: row.jobId,
-      code: 'audit-estimate-begun',
+      code: 'history-estimate-begun',
       values: { number: row.number },
     });
     await this.refresh(workshopId, row.id);
@@ -93,6 +97,10 @@ export class EstimateService {
     if (kept) return kept;
     const whole = await this.whole(actor.workshopId, id);
     return presentEstimate(whole, await this.figures(whole), audience);
+  }
+
+  draft(whole: WholeEstimate): Draft {
+    return draftInOrder(whole.estimate.settings, whole.pieces, whole.members);
   }
 
   async figures(whole: WholeEstimate): Promise<Figures> {
@@ -127,7 +135,7 @@ export class EstimateService {
     await this.parts.audit.record(actor, {
       subject: { kind: 'estimate', id: row.id },
       jobId: row.jobId,
-      code: 'audit-card-taken',
+      code: 'history-card-taken',
       values,
     });
     const { whole, figures } = await this.refresh(workshopId, at.id);

@@ -13,8 +13,8 @@ export const readingTable = (database: Database) =>
   database.table<ReadingRow>('estimate_readings', {
     workshopId: column.workshopId,
     id: column.id,
-    audience: { ...column.word, primaryKey: true },
+    audience: column.wordKey,
     version: column.whole,
     calculatorVersion: column.whole,
     bytes: column.bytes,
-  } as never);
+  });

@@ -9,4 +9,17 @@ export const rateCards = {
   'card-timber-unknown': 'The rate card has no such timber.',
   'rate-card-none-in-force': 'No rate card is in force today.',
   'history-rate-card-planted': 'The start rate card was put in force',
+  'rate-card-dated':
+    'A rate card that is in force or set for a day is not changed any more; copy it and change the copy.',
+  'rate-card-day-past': 'A rate card begins today or later.',
+  'rate-card-day-taken': '“{name}” begins on that day already; choose another.',
+  'rate-card-begun': 'This rate card has begun; copy it and put the copy in force.',
+  'rate-card-copied': '“{name}” was copied from this card; remove that draft first.',
+  'rate-card-id-taken': 'Another rate card stands under this number already.',
+  'history-rate-card-copied': 'The rate card {name} was begun as a copy of {from}',
+  'history-rate-card-changed': 'The rate card {name} was changed',
+  'history-rate-card-filled': 'The rate card {name} was filled from a workbook',
+  'history-rate-card-removed': 'The draft rate card {name} was removed',
+  'history-rate-card-in-force': 'The rate card {name} was put in force from {day}',
+  'history-rate-card-taken-back': 'The rate card {name} was made a draft again',
 } as const;

@@ -27,7 +27,7 @@ const picture = () =>
     .png()
     .toBuffer();
 
-async function invitation(workshop: TestWorkshop, api: Api) {
+async function invitation(workshop: TestWorkshop) {
   const email = `${randomUUID()}@${workshop.mark.toLowerCase()}.example`;
   const body = { name: `${workshop.mark} Guest`, email, roles: ['bench'] };
   const response = await workshop.people.owner.visitor.call(invite, { body, key: randomUUID() });
@@ -143,8 +143,8 @@ export const accountsRows: MatrixRows = {
   },
   changeOwnName: { prepare: ({ mark }) => ({ body: { name: `${mark} renamed` } }), bySomebodyNew: true },
   listInvitations: {
-    prepare: async (workshop, api) => {
-      await invitation(workshop, api);
+    prepare: async (workshop) => {
+      await invitation(workshop);
       return {};
     },
   },
@@ -156,17 +156,17 @@ export const accountsRows: MatrixRows = {
     history: 'history-person-invited',
   },
   withdrawInvitation: {
-    prepare: async (workshop, api) => ({ params: { id: (await invitation(workshop, api)).id } }),
+    prepare: async (workshop) => ({ params: { id: (await invitation(workshop)).id } }),
     history: 'history-invitation-withdrawn',
   },
   readInvitation: {
     prepare: async (workshop, api) => ({
-      body: { token: await tokenFor(api, (await invitation(workshop, api)).email) },
+      body: { token: await tokenFor(api, (await invitation(workshop)).email) },
     }),
   },
   acceptInvitation: {
     prepare: async (workshop, api) => {
-      const token = await tokenFor(api, (await invitation(workshop, api)).email);
+      const token = await tokenFor(api, (await invitation(workshop)).email);
       return { body: { token, name: `${workshop.mark} Guest`, password: newPassword } };
     },
   },

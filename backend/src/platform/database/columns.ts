@@ -6,6 +6,7 @@ import { DataTypes } from 'sequelize';
  */
 export const column = {
   id: { type: DataTypes.CHAR(36), primaryKey: true },
+  wordKey: { type: DataTypes.STRING, primaryKey: true },
   workshopId: { type: DataTypes.CHAR(36), primaryKey: true },
   reference: { type: DataTypes.CHAR(36) },
   hash: { type: DataTypes.CHAR(64) },

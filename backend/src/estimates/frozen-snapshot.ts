@@ -1,0 +1,42 @@
+import { createHash } from 'node:crypto';
+import { gunzipSync, gzipSync } from 'node:zlib';
+import { canonicalJson } from '#shared/estimates/canonical-json';
+import type { Snapshot } from '#shared/estimates/snapshot';
+import type { IssueRow } from './issue-model';
+import type { WholeEstimate } from './worked-estimate';
+
+/** A snapshot as it is kept: gzipped canonical JSON and the SHA-256 of that JSON. */
+export function frozenSnapshot(snapshot: Snapshot): Pick<IssueRow, 'snapshot' | 'sha256'> {
+  const json = canonicalJson(snapshot);
+  return { snapshot: gzipSync(json), sha256: createHash('sha256').update(json).digest('hex') };
+}
+
+/** Reads a kept snapshot; throws when the bytes are not those that were frozen. */
+export function thawedSnapshot(row: Pick<IssueRow, 'snapshot' | 'sha256' | 'id'>): Snapshot {
+  const json = gunzipSync(row.snapshot);
+  const found = createHash('sha256').update(json).digest('hex');
+  if (found !== row.sha256) throw new Error(`issue ${row.id} is not what was frozen`);
+  return JSON.parse(json.toString('utf8')) as Snapshot;
+}
+
+/** A frozen estimate put as the tables would hold it, so that one presenter serves drafts and issues. */
+export function wholeOfSnapshot(
+  { draft, estimate, workshop, issuedAt }: Snapshot,
+  row: IssueRow & { jobId: string; rateCardId: string },
+): WholeEstimate {
+  const { workshopId, jobId, rateCardId } = row;
+  const common = { workshopId, estimateId: estimate.id, version: 1 };
+  return {
+    estimate: {
+      ...{ workshopId, id: estimate.id, jobId, number: estimate.number, version: 1, rateCardId },
+      currency: workshop.currency,
+      settings: draft.settings,
+      settingsVersion: 1,
+      members: draft.members.length,
+      letter: estimate.letter,
+      changedAt: new Date(issuedAt),
+    },
+    pieces: draft.pieces.map(({ id, ...content }) => ({ ...common, id, content })),
+    members: draft.members.map(({ id, ...content }) => ({ ...common, id, content, pieceId: content.pieceId })),
+  };
+}

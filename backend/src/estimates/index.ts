@@ -1,0 +1,72 @@
+import type { Accounts } from '../accounts';
+import type { Audit } from '../audit';
+import type { Jobs } from '../jobs';
+import type { Route } from '../platform/http/mount';
+import type { Platform } from '../platform/platform';
+import type { CardEffects, RateCards } from '../rate-cards';
+import { cardEffects } from './card-effects';
+import { ChangeService } from './change-service';
+import { memberRepository, pieceRepository } from './content-repository';
+import { EstimateRepository } from './estimate-repository';
+import { estimateRoutes } from './estimate-routes';
+import { EstimateService } from './estimate-service';
+import type { PaperMaker } from './issue-papers';
+import { IssueRepository } from './issue-repository';
+import { issueRoutes } from './issue-routes';
+import { IssueService } from './issue-service';
+import { PresenceRepository } from './presence-repository';
+import { PresenceService } from './presence-service';
+import { ReadingRepository } from './reading-repository';
+import { ReadingService } from './reading-service';
+
+export type { BenchSheetRequest, PaperFile, PaperMaker } from './issue-papers';
+export type { EstimateService } from './estimate-service';
+export type { IssueService } from './issue-service';
+
+export interface Estimates {
+  readonly drafts: EstimateService;
+  readonly issues: IssueService;
+  /** Whether anything of a job was issued. */
+  readonly hasIssues: (workshopId: string, jobId: string) => Promise<boolean>;
+  /** What another rate card does to every open estimate. */
+  readonly cardEffects: CardEffects;
+  readonly routes: readonly Route[];
+}
+
+/** What stands before estimates in the list of features, and the maker of papers that stands after. */
+export interface EstimatesNeeds {
+  readonly accounts: Accounts;
+  readonly audit: Audit;
+  readonly rateCards: RateCards;
+  readonly jobs: Jobs;
+  readonly papers: PaperMaker;
+}
+
+/** Estimates: drafts and their issues. */
+export function openEstimates({ database, clock, files }: Platform, needs: EstimatesNeeds): Estimates {
+  const parts = {
+    estimates: new EstimateRepository(database),
+    pieces: pieceRepository(database),
+    members: memberRepository(database),
+    cards: needs.rateCards.service,
+    jobs: needs.jobs,
+    workshops: needs.accounts.workshops,
+    audit: needs.audit.service,
+    clock,
+  };
+  const readings = new ReadingService(new ReadingRepository(database));
+  const drafts = new EstimateService({ ...parts, readings, changes: new ChangeService(parts) });
+  const issues = new IssueService({
+    ...parts,
+    drafts,
+    issues: new IssueRepository(database),
+    files,
+    papers: needs.papers,
+  });
+  const presences = new PresenceService({ ...parts, presences: new PresenceRepository(database) });
+  const hasIssues = async (workshopId: string, jobId: string): Promise<boolean> =>
+    (await drafts.ofJob(workshopId, jobId)).some((estimate) => estimate.letter !== null);
+  const effects = cardEffects({ drafts, jobs: needs.jobs, cards: needs.rateCards.service });
+  const routes = [...estimateRoutes(drafts, presences), ...issueRoutes(issues)];
+  return { drafts, issues, hasIssues, cardEffects: effects, routes };
+}

@@ -1,0 +1,62 @@
+import type { IssueState, Paper } from '#shared/estimates/issue-schema';
+import type { Database } from '../platform/database/database';
+import { WorkshopRows } from '../platform/database/workshop-rows';
+import { issuePaperTable, issueTable, type IssuePaperRow, type IssueRow } from './issue-model';
+
+/** What a person marks of an issue. */
+export type IssueMark = Pick<IssueRow, 'state' | 'markedOn' | 'markNote'>;
+
+/** Issues: added and read; nothing but their state with the client is ever written again. */
+export class IssueRepository {
+  private readonly issues: WorkshopRows<IssueRow>;
+  private readonly papers: WorkshopRows<IssuePaperRow>;
+
+  constructor(database: Database) {
+    this.issues = new WorkshopRows(issueTable(database));
+    this.papers = new WorkshopRows(issuePaperTable(database));
+  }
+
+  /** The newest first. */
+  ofEstimate(workshopId: string, estimateId: string): Promise<IssueRow[]> {
+    return this.issues.list(workshopId, { where: { estimateId }, order: [['sequence', 'DESC']] });
+  }
+
+  async newest(
+    workshopId: string,
+    estimateId: string,
+    before = Number.MAX_SAFE_INTEGER,
+  ): Promise<IssueRow | undefined> {
+    const all = await this.ofEstimate(workshopId, estimateId);
+    return all.find((issue) => issue.sequence < before);
+  }
+
+  get(workshopId: string, id: string): Promise<IssueRow> {
+    return this.issues.get(workshopId, id);
+  }
+
+  lock(workshopId: string, id: string): Promise<IssueRow> {
+    return this.issues.lock(workshopId, id);
+  }
+
+  add(workshopId: string, issue: Omit<IssueRow, 'workshopId'>): Promise<IssueRow> {
+    return this.issues.insert(workshopId, issue);
+  }
+
+  async mark(workshopId: string, id: string, mark: IssueMark): Promise<IssueRow> {
+    await this.issues.write(workshopId, id, mark);
+    return this.get(workshopId, id);
+  }
+
+  async markAs(workshopId: string, id: string, state: IssueState): Promise<void> {
+    await this.issues.write(workshopId, id, { state });
+  }
+
+  async addPaper(workshopId: string, paper: Omit<IssuePaperRow, 'workshopId'>): Promise<void> {
+    await this.papers.insert(workshopId, paper);
+  }
+
+  async paperFile(workshopId: string, issueId: string, paper: Paper): Promise<string | undefined> {
+    const [row] = await this.papers.list(workshopId, { where: { issueId, paper }, limit: 1 });
+    return row?.fileId;
+  }
+}

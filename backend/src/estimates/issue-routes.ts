@@ -1,0 +1,27 @@
+import {
+  issueEstimate,
+  listIssues,
+  markIssue,
+  readBenchSheet,
+  readDifferences,
+  readIssue,
+  readPaper,
+} from '#shared/estimates/issues-endpoints';
+import { mount, type Route } from '../platform/http/mount';
+import { presentIssue } from './issue-presenter';
+import type { IssueService } from './issue-service';
+
+export const issueRoutes = (issues: IssueService): Route[] => [
+  mount(listIssues, async ({ actor, params }) => {
+    const rows = await issues.ofEstimate(actor.workshopId, params.estimateId);
+    return { items: rows.map(presentIssue) };
+  }),
+  mount(issueEstimate, async ({ actor, params, body }) =>
+    presentIssue(await issues.issue(actor, params.estimateId, body)),
+  ),
+  mount(readDifferences, ({ actor, params }) => issues.differences(actor.workshopId, params.estimateId)),
+  mount(readIssue, ({ actor, params }) => issues.read(actor, params.issueId)),
+  mount(markIssue, async ({ actor, params, body }) => presentIssue(await issues.mark(actor, params.issueId, body))),
+  mount(readPaper, ({ actor, params }) => issues.paper(actor.workshopId, params.issueId, params.paper)),
+  mount(readBenchSheet, ({ actor, params }) => issues.benchSheet(actor.workshopId, params.estimateId, params.pieceId)),
+];

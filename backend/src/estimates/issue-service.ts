@@ -1,0 +1,229 @@
+import { v7 as newId } from 'uuid';
+import type { Actor } from '#shared/actor/actor';
+import { audienceOf } from '#shared/actor/role';
+import { calculatorVersion } from '#shared/estimates/calculator-version';
+import type { CostedEstimate, PricedEstimate } from '#shared/estimates/estimate-schema';
+import { issueLetter } from '#shared/estimates/issue-letter';
+import type { IssueState, Paper } from '#shared/estimates/issue-schema';
+import { lineDifferences, type LineDifference, type NamedLines } from '#shared/estimates/line-differences';
+import type { Snapshot } from '#shared/estimates/snapshot';
+import { Rejection } from '#shared/problems/rejection';
+import { jobNumber, type NamedJobRow } from '../jobs';
+import type { FileStore } from '../platform/files/file-store';
+import { dayOfInstant } from '#shared/calendar/day-of-instant';
+import { FileAnswer } from '../platform/http/answer';
+import type { EstimateParts, EstimateService } from './estimate-service';
+import { presentEstimate } from './estimate-presenter';
+import { frozenSnapshot, thawedSnapshot, wholeOfSnapshot } from './frozen-snapshot';
+import type { IssueRow } from './issue-model';
+import type { PaperMaker } from './issue-papers';
+import { mayBeIssued, mayBeMarked } from './issue-policy';
+import { presentIssue } from './issue-presenter';
+import type { IssueRepository } from './issue-repository';
+import { snapshotOf, snapshotWorkshop } from './snapshot-of';
+import type { WholeEstimate } from './worked-estimate';
+
+export interface IssueParts extends Pick<
+  EstimateParts,
+  'estimates' | 'cards' | 'jobs' | 'workshops' | 'audit' | 'clock'
+> {
+  readonly drafts: EstimateService;
+  readonly issues: IssueRepository;
+  readonly files: FileStore;
+  readonly papers: PaperMaker;
+}
+
+export interface IssueRequest {
+  readonly version: number;
+  readonly note: string;
+  readonly acceptsOldCard: boolean;
+}
+
+const namedLines = ({ draft, figures }: Pick<Snapshot, 'draft' | 'figures'>): NamedLines => ({
+  lines: figures.price.lines,
+  memberNames: Object.fromEntries(draft.members.map((member) => [member.id, member.name])),
+});
+
+const auditCodes = {
+  sent: 'history-issue-sent',
+  accepted: 'history-issue-accepted',
+  declined: 'history-issue-declined',
+} as const;
+
+/** Issues: freezing an estimate with its papers, reading them back, and marking where they stand with the client. */
+export class IssueService {
+  constructor(private readonly parts: IssueParts) {}
+
+  async ofEstimate(workshopId: string, estimateId: string): Promise<IssueRow[]> {
+    await this.parts.estimates.get(workshopId, estimateId);
+    return this.parts.issues.ofEstimate(workshopId, estimateId);
+  }
+
+  /** Freezes the next issue, all or nothing: snapshot, papers, letter, history and the state of the one before. */
+  async issue(actor: Actor, estimateId: string, request: IssueRequest): Promise<IssueRow> {
+    const { workshopId } = actor;
+    await this.parts.estimates.lock(workshopId, estimateId);
+    const whole = await this.parts.drafts.whole(workshopId, estimateId);
+    const figures = await this.parts.drafts.figures(whole);
+    const inForce = await this.parts.cards.inForce(workshopId);
+    mayBeIssued({ whole, figures, request, cardInForceId: inForce.id });
+    const before = await this.parts.issues.newest(workshopId, estimateId);
+    const snapshot = await this.freeze(
+      actor,
+      { whole, figures },
+      { letter: issueLetter((before?.sequence ?? 0) + 1), note: request.note },
+    );
+    const row = await this.keep(actor, snapshot, (before?.sequence ?? 0) + 1);
+    if (before && (before.state === 'issued' || before.state === 'sent'))
+      await this.parts.issues.markAs(workshopId, before.id, 'replaced');
+    await this.parts.estimates.write(workshopId, estimateId, { letter: row.letter });
+    const values = { letter: row.letter, number: whole.estimate.number };
+    await this.parts.audit.record(actor, {
+      subject: { kind: 'issue', id: row.id },
+      jobId: whole.estimate.jobId,
+      code: 'history-issued',
+      values,
+    });
+    await this.parts.jobs.touch(workshopId, whole.estimate.jobId);
+    return row;
+  }
+
+  /** Marks an issue sent, accepted or declined; the job's state follows. */
+  async mark(
+    actor: Actor,
+    id: string,
+    mark: { state: 'sent' | 'accepted' | 'declined'; day: string; note: string },
+  ): Promise<IssueRow> {
+    const { workshopId } = actor;
+    const issue = await this.parts.issues.lock(workshopId, id);
+    const { timeZone } = await this.parts.workshops.get(workshopId);
+    const issued = dayOfInstant(issue.issuedAt.getTime(), timeZone);
+    mayBeMarked(issue, mark, { issued, today: await this.parts.cards.today(workshopId) });
+    const row = await this.parts.issues.mark(workshopId, id, {
+      state: mark.state as IssueState,
+      markedOn: mark.day,
+      markNote: mark.note,
+    });
+    const estimate = await this.parts.estimates.get(workshopId, issue.estimateId);
+    await this.parts.jobs.markState(actor, estimate.jobId, mark.state);
+    const values = { letter: issue.letter, number: estimate.number };
+    await this.parts.audit.record(actor, {
+      subject: { kind: 'issue', id },
+      jobId: estimate.jobId,
+      code: auditCodes[mark.state],
+      values,
+    });
+    return row;
+  }
+
+  async read(actor: Actor, id: string) {
+    const { workshopId } = actor;
+    const row = await this.parts.issues.get(workshopId, id);
+    const estimate = await this.parts.estimates.get(workshopId, row.estimateId);
+    const snapshot = thawedSnapshot(row);
+    const before = await this.parts.issues.newest(workshopId, row.estimateId, row.sequence);
+    const whole = wholeOfSnapshot(snapshot, { ...row, jobId: estimate.jobId, rateCardId: estimate.rateCardId });
+    return {
+      summary: presentIssue(row),
+      differences: before ? lineDifferences(namedLines(thawedSnapshot(before)), namedLines(snapshot)) : [],
+      estimate: presentEstimate(whole, snapshot.figures, audienceOf(actor.roles)) as CostedEstimate | PricedEstimate,
+    };
+  }
+
+  /** What the draft changes against the newest issue. */
+  async differences(
+    workshopId: string,
+    estimateId: string,
+  ): Promise<{ letter: string | null; lines: LineDifference[] }> {
+    const whole = await this.parts.drafts.whole(workshopId, estimateId);
+    const newest = await this.parts.issues.newest(workshopId, estimateId);
+    if (!newest) return { letter: null, lines: [] };
+    const figures = await this.parts.drafts.figures(whole);
+    const memberNames = Object.fromEntries(whole.members.map(({ id, content }) => [id, content.name]));
+    const after = { lines: figures.price.lines, memberNames };
+    return { letter: newest.letter, lines: lineDifferences(namedLines(thawedSnapshot(newest)), after) };
+  }
+
+  async paper(workshopId: string, issueId: string, paper: Paper): Promise<FileAnswer> {
+    await this.parts.issues.get(workshopId, issueId);
+    const fileId = await this.parts.issues.paperFile(workshopId, issueId, paper);
+    if (!fileId) throw new Rejection('not-found', 'problem-not-found');
+    const { bytes, name, media } = await this.parts.files.read(workshopId, fileId);
+    return new FileAnswer(bytes, { name, media });
+  }
+
+  async benchSheet(workshopId: string, estimateId: string, pieceId: string): Promise<FileAnswer> {
+    const whole = await this.parts.drafts.whole(workshopId, estimateId);
+    const piece = whole.pieces.find((one) => one.id === pieceId);
+    if (!piece) throw new Rejection('not-found', 'problem-not-found');
+    const figures = await this.parts.drafts.figures(whole);
+    const job = await this.job(workshopId, whole.estimate.jobId);
+    const workshop = snapshotWorkshop(await this.parts.workshops.get(workshopId));
+    const today = await this.parts.cards.today(workshopId);
+    const draft = this.parts.drafts.draft(whole);
+    const bytes = await this.parts.papers.benchSheet({ workshop, job, pieceId, draft, figures, today });
+    return new FileAnswer(bytes, { name: `${job.number} ${piece.content.name}.pdf`, media: 'application/pdf' });
+  }
+
+  private async job(workshopId: string, jobId: string): Promise<NamedJobRow & { number: string }> {
+    const row = await this.parts.jobs.job(workshopId, jobId);
+    return { ...row, number: jobNumber(row) };
+  }
+
+  private async freeze(
+    actor: Actor,
+    worked: { whole: WholeEstimate; figures: Snapshot['figures'] },
+    paper: { letter: string; note: string },
+  ): Promise<Snapshot> {
+    const { workshopId } = actor;
+    const { estimate } = worked.whole;
+    const job = await this.job(workshopId, estimate.jobId);
+    const client = await this.parts.jobs.client(workshopId, job.clientId);
+    return snapshotOf({
+      ...worked,
+      ...paper,
+      card: await this.parts.cards.get(workshopId, estimate.rateCardId),
+      workshop: await this.parts.workshops.get(workshopId),
+      client: { name: client.name, contact: client.contact, address: client.address },
+      job: { number: job.number, title: job.title, reference: job.reference, site: job.site },
+      now: this.parts.clock.now(),
+      today: await this.parts.cards.today(workshopId),
+      issuedBy: actor.name,
+    });
+  }
+
+  private async keep(actor: Actor, snapshot: Snapshot, sequence: number): Promise<IssueRow> {
+    const { workshopId } = actor;
+    const { price } = snapshot.figures;
+    const row = await this.parts.issues.add(workshopId, {
+      id: newId(),
+      estimateId: snapshot.estimate.id,
+      sequence,
+      letter: snapshot.estimate.letter,
+      state: 'issued',
+      issuedAt: new Date(snapshot.issuedAt),
+      issuedBy: snapshot.issuedBy,
+      note: snapshot.note,
+      validUntil: snapshot.validUntil,
+      leafValidUntil: snapshot.leafValidUntil,
+      markedOn: null,
+      markNote: '',
+      netMinor: price.net_minor,
+      taxMinor: price.tax_minor,
+      grossMinor: price.gross_minor,
+      calculatorVersion,
+      ...frozenSnapshot(snapshot),
+    });
+    await this.keepPapers(workshopId, row.id, snapshot);
+    return row;
+  }
+
+  private async keepPapers(workshopId: string, issueId: string, snapshot: Snapshot): Promise<void> {
+    const { logoFileId } = await this.parts.workshops.get(workshopId);
+    const logo = logoFileId ? (await this.parts.workshops.logo(workshopId)).bytes : null;
+    for (const { paper, name, media, bytes } of await this.parts.papers.issuePapers(snapshot, logo)) {
+      const file = await this.parts.files.save(workshopId, { name, media, bytes });
+      await this.parts.issues.addPaper(workshopId, { id: newId(), issueId, paper, fileId: file.id });
+    }
+  }
+}

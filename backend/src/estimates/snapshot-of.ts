@@ -1,0 +1,78 @@
+import { addDays } from '#shared/calendar/add-days';
+import { calculatorVersion } from '#shared/estimates/calculator-version';
+import { draftInOrder } from '#shared/estimates/draft-in-order';
+import { estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
+import type { Figures } from '#shared/estimates/figures';
+import { riskOf } from '#shared/estimates/risk/risk-of';
+import type { Snapshot, SnapshotClient, SnapshotJob, SnapshotWorkshop } from '#shared/estimates/snapshot';
+import type { WorkshopSettingsRow } from '../accounts';
+import type { RateCardRow } from '../rate-cards';
+import type { WholeEstimate } from './worked-estimate';
+
+/** Everything an issue freezes, as it stands at the moment of issuing. */
+export interface Freezing {
+  readonly whole: WholeEstimate;
+  readonly figures: Figures;
+  readonly card: RateCardRow;
+  readonly workshop: WorkshopSettingsRow;
+  readonly client: SnapshotClient;
+  readonly job: SnapshotJob;
+  readonly letter: string;
+  readonly now: Date;
+  readonly today: string;
+  readonly issuedBy: string;
+  readonly note: string;
+}
+
+export const snapshotWorkshop = (workshop: WorkshopSettingsRow): SnapshotWorkshop => {
+  const { name, addressLines, telephone, email, taxRegistration, currency, locale } = workshop;
+  const { lengthUnit, timeZone, paperSize, country } = workshop;
+  return {
+    name,
+    addressLines,
+    telephone,
+    email,
+    taxRegistration,
+    currency,
+    locale,
+    lengthUnit,
+    timeZone,
+    paperSize,
+    country,
+  };
+};
+
+function alternativesOf({ whole, figures, card }: Freezing): Snapshot['alternatives'] {
+  const { settings, currency } = whole.estimate;
+  const draft = draftInOrder(settings, whole.pieces, whole.members);
+  return settings.alternatives.map(({ id }) => {
+    const prepared = prepareEstimate({ draft, choice: [id], card: card.content, currency });
+    const { gross_minor } = estimateFigures(prepared, riskOf(prepared.risk)).price;
+    return { id, gross_minor, difference_minor: gross_minor - figures.price.gross_minor };
+  });
+}
+
+/** Freezes an estimate: inputs, card, results, the paper's particulars; validity runs from the day of issue in the workshop's zone. */
+export function snapshotOf(freezing: Freezing): Snapshot {
+  const { whole, figures, card, workshop, client, job, letter, now, today, issuedBy, note } = freezing;
+  const { estimate, pieces, members } = whole;
+  return {
+    snapshotVersion: 1,
+    calculatorVersion,
+    workshop: snapshotWorkshop(workshop),
+    client,
+    job,
+    estimate: { id: estimate.id, number: estimate.number, letter },
+    issuedAt: now.toISOString(),
+    issuedOn: today,
+    issuedBy,
+    validUntil: addDays(today, estimate.settings.validity_days),
+    leafValidUntil: addDays(today, estimate.settings.leafValidity_days),
+    note,
+    draft: draftInOrder(estimate.settings, pieces, members),
+    card: card.content,
+    choice: [],
+    figures,
+    alternatives: alternativesOf(freezing),
+  };
+}

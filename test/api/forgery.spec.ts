@@ -1,0 +1,69 @@
+import { changeOwnName } from '#shared/accounts/people-endpoints';
+import { endOtherSessions } from '#shared/accounts/session-endpoints';
+import { endpoints } from '#shared/endpoints';
+import { startApi, type Api } from './start-api';
+
+/** Another site cannot make a browser change anything here (ASVS 3.5.1 to 3.5.3; OWASP on Fetch Metadata and synchroniser tokens). */
+let api: Api;
+beforeAll(async () => {
+  api = await startApi();
+}, 60_000);
+afterAll(() => api.stop());
+
+const nameOf = async (): Promise<string> => {
+  const { body } = await api.as('bench').agent.get('/api/session');
+  return (body as { signedIn: { name: string } }).signedIn.name;
+};
+
+const send = (headers: Record<string, string>, body: string | object = { name: 'Forged Name' }) => {
+  const test = api.as('bench').agent.put(changeOwnName.path).set(headers);
+  return test.send(body);
+};
+const own = () => ({ 'x-csrf-token': api.as('bench').token });
+
+test.each([
+  ['without a token', () => ({})],
+  ['with an empty token', () => ({ 'x-csrf-token': '' })],
+  ['with the token of another session', () => ({ 'x-csrf-token': api.as('owner').token })],
+  ['from another site', () => ({ ...own(), 'sec-fetch-site': 'cross-site' })],
+  ['from a sister site', () => ({ ...own(), 'sec-fetch-site': 'same-site' })],
+  ['typed into the address bar', () => ({ ...own(), 'sec-fetch-site': 'none' })],
+  ['with a foreign Origin', () => ({ ...own(), origin: 'https://evil.test' })],
+  ['with an Origin that says nothing', () => ({ ...own(), origin: 'null' })],
+  ['with a foreign Referer', () => ({ ...own(), referer: 'https://evil.test/page' })],
+])('a change %s is refused and nothing changes', async (_, headers) => {
+  const response = await send(headers());
+  expect(response.status).toBe(403);
+  expect(response.headers['content-type']).toContain('application/problem+json');
+  expect(response.headers['vary']).toMatch(/Sec-Fetch-Site/);
+  expect(await nameOf()).toBe('Herons bench');
+});
+
+test.each(['text/plain', 'application/x-www-form-urlencoded', 'application/xml'])(
+  'a body of %s is refused',
+  async (type) => {
+    const response = await send({ ...own(), 'content-type': type }, '{"name":"Forged Name"}');
+    expect(response.status).toBe(403);
+    expect(await nameOf()).toBe('Herons bench');
+  },
+);
+
+test('our own page may change something', async () => {
+  const response = await send({ ...own(), 'sec-fetch-site': 'same-origin' }, { name: 'Herons bench' });
+  expect(response.status).toBe(200);
+});
+
+test('a token is of no use under another method override', async () => {
+  const response = await api.as('bench').agent.get(endOtherSessions.path).set('x-http-method-override', 'DELETE');
+  expect(response.status).toBe(200);
+});
+
+test('no reading changes anything', async () => {
+  const watched = ['accounts', 'workshops', 'memberships', 'invitations', 'mailed_links', 'audit', 'tasks', 'files'];
+  const sums = () => api.platform.database.select('CHECKSUM TABLE ' + watched.join(', '));
+  const before = await sums();
+  for (const { path } of endpoints.filter(({ method, path: at }) => method === 'get' && !at.includes(':'))) {
+    await api.as('owner').agent.get(path);
+  }
+  expect(await sums()).toEqual(before);
+});

@@ -1,0 +1,143 @@
+import { mkdirSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
+import request from 'supertest';
+import { putLogo, readLogo } from '#shared/accounts/workshop-endpoints';
+import { disposition } from '../../backend/src/platform/http/send';
+import { startApi, type Api } from './start-api';
+
+/** What every answer carries, and what none does (ASVS 3.2.1, 3.4, 4.1.1, 13.4, 14.3.2). */
+let api: Api;
+beforeAll(async () => {
+  api = await startApi();
+  const { webFolder } = api.platform.config;
+  mkdirSync(webFolder, { recursive: true });
+  writeFileSync(join(webFolder, 'index.html'), '<!doctype html><app-root ngCspNonce="CSP_NONCE"></app-root>');
+  writeFileSync(join(webFolder, 'main-ABCDEFGH.js'), 'void 0;');
+  writeFileSync(join(webFolder, 'mark.svg'), '<svg xmlns="http://www.w3.org/2000/svg"/>');
+}, 60_000);
+afterAll(() => api.stop());
+
+const get = (path: string) => request(api.app.web.express).get(path);
+
+describe.each([
+  '/',
+  '/jobs',
+  '/main-ABCDEFGH.js',
+  '/api/session',
+  '/api/people',
+  '/api/nothing',
+  '/nothing.js',
+  '/healthz',
+  '/api/reference',
+])('the answer to %s', (path) => {
+  test('tells the browser to keep to it', async () => {
+    const { headers } = await get(path);
+    expect(headers).toMatchObject({
+      'x-content-type-options': 'nosniff',
+      'referrer-policy': 'no-referrer',
+      'x-frame-options': 'DENY',
+      'strict-transport-security': 'max-age=31536000; includeSubDomains',
+    });
+    expect(headers['content-security-policy']).toMatch(/frame-ancestors 'none'/);
+    expect(headers['content-security-policy']).not.toMatch(/unsafe-(inline|eval)/);
+    expect(headers['content-type']).toMatch(
+      /^(text\/(html|javascript)|application\/(json|problem\+json)); charset=utf-8$/,
+    );
+    expect(headers['x-powered-by']).toBeUndefined();
+  });
+
+  test('gives nothing to another site', async () => {
+    for (const origin of ['https://evil.test', 'null']) {
+      const { headers } = await get(path).set('origin', origin);
+      expect(headers['access-control-allow-origin']).toBeUndefined();
+    }
+  });
+});
+
+test('a page has a nonce of its own, in its policy and in its text', async () => {
+  const [first, second] = [await get('/'), await get('/')];
+  const nonce = /'nonce-([^']+)'/.exec(first.headers['content-security-policy'] ?? '')?.[1] ?? '';
+  expect(Buffer.from(nonce, 'base64')).toHaveLength(16);
+  expect(first.text).toContain(`ngCspNonce="${nonce}"`);
+  expect(second.text).not.toContain(nonce);
+});
+
+test('the policy of a page allows our own files only', async () => {
+  const { headers } = await get('/');
+  const policy = headers['content-security-policy'] ?? '';
+  expect(policy).toMatch(/default-src 'self'/);
+  expect(policy).toMatch(/object-src 'none'/);
+  expect(policy).toMatch(/base-uri 'self'/);
+  expect(policy).toMatch(/script-src 'self';/);
+  expect(policy).toMatch(/require-trusted-types-for 'script'/);
+});
+
+test('a file under a hashed name is kept for ever, the page and the API never', async () => {
+  expect((await get('/main-ABCDEFGH.js')).headers['cache-control']).toBe('public, max-age=31536000, immutable');
+  expect((await get('/mark.svg')).headers['cache-control']).toBe('no-cache');
+  expect((await get('/')).headers['cache-control']).toBe('no-store');
+  expect((await get('/api/session')).headers['cache-control']).toBe('no-store');
+  expect((await api.as('owner').agent.get('/api/people')).headers['cache-control']).toBe('no-store');
+});
+
+test.each([
+  '/.git/config',
+  '/.env',
+  '/package.json',
+  '/../package.json',
+  '/%2e%2e/package.json',
+  '/index.html.bak',
+  '/api-docs',
+  '/metrics',
+  '/server-status',
+])('%s is not served', async (path) => {
+  const response = await get(path);
+  expect(response.status).toBe(404);
+  expect(response.text).not.toContain('bolewright"');
+});
+
+test.each(['TRACE', 'TRACK', 'CONNECT', 'PROPFIND'])('the method %s does nothing', async (method) => {
+  const status = await request(api.app.web.express)
+    .get('/api/people')
+    .set('x-http-method-override', method)
+    .then((response) => response.status);
+  expect(status).toBe(401);
+});
+
+test('on loopback the cookie is HttpOnly, lax, without a domain', async () => {
+  const { headers } = await get('/api/session');
+  const [cookie] = headers['set-cookie'] as unknown as string[];
+  expect(cookie).toMatch(/^bolewright=s%3A[^;]+; Path=\/; HttpOnly; SameSite=Lax$/);
+});
+
+test('a file of a user is an attachment or a picture, and may run nothing', async () => {
+  const owner = api.as('owner');
+  const bytes = Buffer.from(
+    'iVBORw0KGgoAAAANSUhEUgAAAAEAAAABCAYAAAAfFcSJAAAADUlEQVR42mNk+M9QDwADhgGAWjR9awAAAABJRU5ErkJggg==',
+    'base64',
+  );
+  const put = await owner.call(putLogo, { version: 1, file: { name: 'mein “Wappen”.png', bytes } });
+  expect(put.status).toBe(200);
+  const { headers, status } = await owner.call(readLogo);
+  expect(status).toBe(200);
+  expect(headers['content-type']).toBe('image/png');
+  expect(headers['content-security-policy']).toBe("default-src 'none'; sandbox");
+  expect(headers['content-disposition']).toBe(
+    'inline; filename="mein _Wappen_.png"; filename*=UTF-8\'\'mein%20%E2%80%9CWappen%E2%80%9D.png',
+  );
+});
+
+test.each([
+  ['a quote', 'a"b.pdf', 'attachment; filename="a_b.pdf"; filename*=UTF-8\'\'a%22b.pdf'],
+  [
+    'a line break',
+    'a\r\nSet-Cookie: x=1.pdf',
+    'attachment; filename="aSet-Cookie: x=1.pdf"; filename*=UTF-8\'\'aSet-Cookie%3A%20x%3D1.pdf',
+  ],
+  ['an umlaut', 'Höhe.pdf', 'attachment; filename="H_he.pdf"; filename*=UTF-8\'\'H%C3%B6he.pdf'],
+  ['a mark that turns the direction', 'a\u202Efdp.exe', 'attachment; filename="afdp.exe"; filename*=UTF-8\'\'afdp.exe'],
+  ['a folder', '../../etc/x', 'attachment; filename="..-..-etc-x"; filename*=UTF-8\'\'..-..-etc-x'],
+  ['a percent sign', '100%.pdf', 'attachment; filename="100_.pdf"; filename*=UTF-8\'\'100%25.pdf'],
+])('a file name with %s makes one header (RFC 6266, RFC 8187)', (_, name, header) => {
+  expect(disposition(name)).toBe(header);
+});
