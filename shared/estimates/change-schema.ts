@@ -1,5 +1,7 @@
 import * as z from 'zod';
 import { memberContentSchema, pieceContentSchema } from '#shared/estimates/member-schema';
+import type { MemberContent, PieceContent } from '#shared/estimates/member';
+import type { EstimateSettings } from '#shared/estimates/settings';
 import { settingsSchema } from '#shared/estimates/settings-schema';
 import { identifier, versionSeen } from '#shared/problems/entry-schema';
 
@@ -19,7 +21,17 @@ export const changeSchema = z.discriminatedUnion('kind', [
   }),
   z.strictObject({ kind: z.literal('settings'), id: identifier, version: versionSeen, content: settingsSchema }),
 ]);
-export type Change = z.infer<typeof changeSchema>;
+interface ChangeOf<Kind, Content> {
+  readonly kind: Kind;
+  readonly id: string;
+  readonly version: number;
+  readonly content: Content;
+}
+
+export type Change =
+  | ChangeOf<'member', MemberContent | null>
+  | ChangeOf<'piece', PieceContent | null>
+  | ChangeOf<'settings', EstimateSettings>;
 
 /** Several changes kept together or not at all: paste, duplicate, mirror and reorder send many. */
 export const changesSchema = z.strictObject({ changes: z.array(changeSchema).min(1).max(500) });
