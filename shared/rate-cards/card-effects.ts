@@ -1,4 +1,5 @@
 import type { MinorUnits } from '#shared/money/decimal';
+import type { Finding } from '#shared/words/finding';
 
 /** A line of an estimate that another card prices otherwise; null where one of the two prices has no such line. */
 export interface CardEffectLine {
@@ -22,4 +23,6 @@ export interface CardEffect {
   readonly before_minor: MinorUnits;
   readonly after_minor: MinorUnits;
   readonly lines: readonly CardEffectLine[];
+  /** What the new card lacks or forbids and the old one did not. */
+  readonly findings: readonly Finding[];
 }

@@ -1,9 +1,38 @@
-import { listRateCards, readRateCard } from '#shared/rate-cards/rate-cards-endpoints';
+import {
+  copyRateCard,
+  keepRateCard,
+  listRateCards,
+  putRateCardInForce,
+  readCardDifferences,
+  readRateCard,
+  removeRateCard,
+  takeRateCardBack,
+} from '#shared/rate-cards/rate-cards-endpoints';
 import { mount, type Route } from '../platform/http/mount';
+import type { CardInForceService } from './card-in-force-service';
+import type { DraftCardService } from './draft-card-service';
+import type { RateCardHead, RateCardRow } from './rate-card-model';
 import { presentRateCard, presentWholeRateCard } from './rate-card-presenter';
 import type { RateCardService } from './rate-card-service';
 
-export const rateCardRoutes = (cards: RateCardService): Route[] => [
+interface Parts {
+  readonly cards: RateCardService;
+  readonly drafts: DraftCardService;
+  readonly inForce: CardInForceService;
+}
+
+type Presented = (head: RateCardHead) => Promise<ReturnType<typeof presentRateCard>>;
+
+/** A card as a list has it, with where it stands today. */
+const presenterFor =
+  (cards: RateCardService): Presented =>
+  async (head) =>
+    presentRateCard(head, await cards.cardsToday(head.workshopId));
+
+/** What stands where somebody saw an older version: only drafts and cards whose day has not come get as far as that question. */
+const presentCurrent = (row: RateCardRow) => presentWholeRateCard(row, { day: '', inForceId: null });
+
+const readingRoutes = (cards: RateCardService): Route[] => [
   mount(listRateCards, async ({ actor, query }) => {
     const page = await cards.page(actor.workshopId, query);
     const today = await cards.cardsToday(actor.workshopId);
@@ -13,4 +42,38 @@ export const rateCardRoutes = (cards: RateCardService): Route[] => [
     const row = await cards.get(actor.workshopId, params.rateCardId);
     return presentWholeRateCard(row, await cards.cardsToday(actor.workshopId));
   }),
+  mount(readCardDifferences, async ({ actor, params, query }) => {
+    const { against, differences } = await cards.differences(actor.workshopId, params.rateCardId, query.against);
+    return { against: presentRateCard(against, await cards.cardsToday(actor.workshopId)), differences };
+  }),
 ];
+
+export const rateCardRoutes = ({ cards, drafts, inForce }: Parts): Route[] => {
+  const present = presenterFor(cards);
+  return [
+    ...readingRoutes(cards),
+    mount(copyRateCard, async ({ actor, params, body }) => present(await drafts.copy(actor, params.rateCardId, body))),
+    mount(
+      keepRateCard,
+      async ({ actor, params, version, body }) =>
+        present(await drafts.keep(actor, { id: params.rateCardId, version }, body)),
+      presentCurrent,
+    ),
+    mount(
+      removeRateCard,
+      ({ actor, params, version }) => drafts.remove(actor, { id: params.rateCardId, version }),
+      presentCurrent,
+    ),
+    mount(
+      putRateCardInForce,
+      async ({ actor, params, version, body }) =>
+        present(await inForce.put(actor, { id: params.rateCardId, version }, body.from)),
+      presentCurrent,
+    ),
+    mount(
+      takeRateCardBack,
+      async ({ actor, params, version }) => present(await inForce.takeBack(actor, { id: params.rateCardId, version })),
+      presentCurrent,
+    ),
+  ];
+};

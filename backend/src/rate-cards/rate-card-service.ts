@@ -1,4 +1,5 @@
 import { v7 as newId } from 'uuid';
+import { cardDifferences, type CardDifference } from '#shared/rate-cards/card-differences';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { startCard } from '#shared/rate-cards/start-card';
 import { dayOfInstant } from '#shared/calendar/day-of-instant';
@@ -16,6 +17,12 @@ interface Parts {
   readonly workshops: WorkshopService;
   readonly audit: AuditService;
   readonly clock: Clock;
+}
+
+/** Two cards line by line. */
+export interface ComparedCards {
+  readonly against: RateCardRow;
+  readonly differences: CardDifference[];
 }
 
 /** The first of all days: the start card is in force from the beginning. */
@@ -55,6 +62,15 @@ export class RateCardService {
 
   async card(workshopId: string, id: string): Promise<RateCard> {
     return (await this.get(workshopId, id)).content;
+  }
+
+  /** What a card changes against another; without one named, against the card in force, and of that against its model. */
+  async differences(workshopId: string, id: string, againstId?: string): Promise<ComparedCards> {
+    const card = await this.get(workshopId, id);
+    const inForce = await this.inForce(workshopId);
+    const model = inForce.id === id ? (card.basedOnId ?? id) : inForce.id;
+    const against = await this.get(workshopId, againstId ?? model);
+    return { against, differences: cardDifferences(against.content, card.content) };
   }
 
   private async plantStartCard(by: Doer): Promise<void> {

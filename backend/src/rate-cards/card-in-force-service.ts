@@ -1,0 +1,53 @@
+import type { Actor } from '#shared/actor/actor';
+import { Rejection } from '#shared/problems/rejection';
+import type { WordCode, WordValues } from '#shared/words/word-code';
+import type { Clock } from '../platform/clock/clock';
+import { refuseStale, type Seen } from '../platform/database/keeping';
+import type { CardHistory } from './card-history';
+import type { RateCardHead } from './rate-card-model';
+import type { RateCardRepository } from './rate-card-repository';
+
+interface Parts {
+  readonly cards: RateCardRepository;
+  readonly history: CardHistory;
+  readonly clock: Clock;
+  /** The day it is in a workshop. */
+  readonly today: (workshopId: string) => Promise<string>;
+}
+
+function ofDay(kind: 'invalid' | 'conflict', code: WordCode, values: WordValues = {}): Rejection {
+  return new Rejection(kind, code, { values, complaints: [{ path: ['from'], code, values }] });
+}
+
+/** The day from which a card is worked with: given once, and taken back only before it has come. */
+export class CardInForceService {
+  constructor(private readonly parts: Parts) {}
+
+  /** Gives a draft its day; the same again changes nothing. */
+  async put(actor: Actor, seen: Seen, from: string): Promise<RateCardHead> {
+    const { cards, history } = this.parts;
+    const card = await cards.lock(actor.workshopId, seen.id);
+    if (card.inForceFrom === from) return card;
+    if (card.inForceFrom !== null) throw new Rejection('conflict', 'rate-card-dated');
+    refuseStale(card, seen.version);
+    if (from < (await this.parts.today(actor.workshopId))) throw ofDay('invalid', 'rate-card-day-past');
+    const other = await cards.headFrom(actor.workshopId, from);
+    if (other) throw ofDay('conflict', 'rate-card-day-taken', { name: other.name });
+    const dated = await cards.change(actor.workshopId, card, { inForceFrom: from, changedAt: this.parts.clock.now() });
+    await history.record(actor, dated, { code: 'history-rate-card-in-force', values: { day: from } });
+    return dated;
+  }
+
+  /** Makes a card whose day has not come a draft again; a draft stays one. */
+  async takeBack(actor: Actor, seen: Seen): Promise<RateCardHead> {
+    const { cards, history } = this.parts;
+    const card = await cards.lock(actor.workshopId, seen.id);
+    if (card.inForceFrom === null) return card;
+    if (card.inForceFrom <= (await this.parts.today(actor.workshopId)))
+      throw new Rejection('conflict', 'rate-card-begun');
+    refuseStale(card, seen.version);
+    const draft = await cards.change(actor.workshopId, card, { inForceFrom: null, changedAt: this.parts.clock.now() });
+    await history.record(actor, draft, { code: 'history-rate-card-taken-back' });
+    return draft;
+  }
+}

@@ -1,0 +1,92 @@
+import { isDeepStrictEqual } from 'node:util';
+import type { Actor } from '#shared/actor/actor';
+import { Rejection } from '#shared/problems/rejection';
+import type { RateCard } from '#shared/rate-cards/rate-card';
+import type { Clock } from '../platform/clock/clock';
+import { refuseStale, type Seen } from '../platform/database/keeping';
+import type { CardHistory } from './card-history';
+import type { RateCardHead, RateCardRow } from './rate-card-model';
+import type { RateCardRepository } from './rate-card-repository';
+
+interface Parts {
+  readonly cards: RateCardRepository;
+  readonly history: CardHistory;
+  readonly clock: Clock;
+}
+
+/** What a person keeps of a draft. */
+export interface CardEntry {
+  readonly name: string;
+  readonly content: RateCard;
+}
+
+function refuseDated({ inForceFrom }: RateCardHead): void {
+  if (inForceFrom !== null) throw new Rejection('conflict', 'rate-card-dated');
+}
+
+const saysAlready = (row: RateCardRow, { name, content }: CardEntry): boolean =>
+  row.name === name && isDeepStrictEqual(row.content, content);
+
+/** Drafts of rate cards: begun as copies, kept, filled from a workbook, removed. A card with a day is left alone. */
+export class DraftCardService {
+  constructor(private readonly parts: Parts) {}
+
+  /** Begins a draft with all that a card holds; the same id again finds what was begun. */
+  async copy(actor: Actor, fromId: string, { id, name }: { id: string; name: string }): Promise<RateCardHead> {
+    const { cards, history, clock } = this.parts;
+    const from = await cards.lock(actor.workshopId, fromId);
+    const basedOnId = from.inForceFrom === null ? from.basedOnId : from.id;
+    const known = await cards.find(actor.workshopId, id);
+    if (known) return sameCopy(known, basedOnId);
+    const start = { id, name, version: 1, inForceFrom: null, changedAt: clock.now() };
+    const row = await cards.insert(actor.workshopId, { ...start, basedOnId, content: from.content });
+    await history.record(actor, row, { code: 'history-rate-card-copied', values: { from: from.name } });
+    return row;
+  }
+
+  /** Keeps a draft; what was sent twice is kept once. */
+  async keep(actor: Actor, seen: Seen, entry: CardEntry): Promise<RateCardHead> {
+    const before = await this.parts.cards.lock(actor.workshopId, seen.id);
+    refuseDated(before);
+    if (saysAlready(before, entry) && before.version <= seen.version + 1) return before;
+    refuseStale(before, seen.version);
+    const after = await this.change(actor, before, entry);
+    const base = await this.baseOf(before);
+    await this.parts.history.recordChange(actor, after, { base, before: before.content, after: entry.content });
+    return after;
+  }
+
+  /** Puts the content of a workbook in place of a draft's own. */
+  async fill(actor: Actor, seen: Seen, content: RateCard): Promise<RateCardHead> {
+    const before = await this.parts.cards.lock(actor.workshopId, seen.id);
+    refuseDated(before);
+    refuseStale(before, seen.version);
+    const after = await this.change(actor, before, { name: before.name, content });
+    await this.parts.history.record(actor, after, { code: 'history-rate-card-filled' });
+    return after;
+  }
+
+  async remove(actor: Actor, { id, version }: Seen): Promise<void> {
+    const { cards, history } = this.parts;
+    const card = await cards.lock(actor.workshopId, id);
+    refuseDated(card);
+    refuseStale(card, version);
+    const copy = await cards.headBasedOn(actor.workshopId, id);
+    if (copy) throw new Rejection('conflict', 'rate-card-copied', { values: { name: copy.name } });
+    await cards.remove(actor.workshopId, id);
+    await history.record(actor, card, { code: 'history-rate-card-removed' });
+  }
+
+  private change({ workshopId }: Actor, before: RateCardRow, { name, content }: CardEntry): Promise<RateCardRow> {
+    return this.parts.cards.change(workshopId, before, { name, content, changedAt: this.parts.clock.now() });
+  }
+
+  private async baseOf({ workshopId, basedOnId, content }: RateCardRow): Promise<RateCard> {
+    return basedOnId === null ? content : (await this.parts.cards.get(workshopId, basedOnId)).content;
+  }
+}
+
+function sameCopy(known: RateCardHead, basedOnId: string | null): RateCardHead {
+  if (known.inForceFrom === null && known.basedOnId === basedOnId) return known;
+  throw new Rejection('conflict', 'rate-card-id-taken');
+}
