@@ -14,6 +14,10 @@ export const appRoutes: Routes = [
       { path: '', pathMatch: 'full', redirectTo: firstPlace },
       ...memberRoutes,
       {
+        path: 'jobs/:jobId/estimates',
+        loadChildren: () => import('./estimates/estimates-routes').then(({ estimatesRoutes }) => estimatesRoutes),
+      },
+      {
         path: '**',
         title: $localize`Nothing here`,
         loadComponent: () => import('./shell/not-found-page').then(({ NotFoundPage }) => NotFoundPage),

@@ -1,0 +1,49 @@
+import { Injectable, inject } from '@angular/core';
+import type { AnswerOf, BodyOf } from '#shared/actor/endpoint';
+import type { Change } from '#shared/estimates/change-schema';
+import type { CostedEstimate, KeptChanges } from '#shared/estimates/estimate-schema';
+import { changeEstimate, readEstimate, takeRateCard, tellPresence } from '#shared/estimates/estimates-endpoints';
+import type { PricedIssueSummary } from '#shared/estimates/issue-schema';
+import { listIssues } from '#shared/estimates/issues-endpoints';
+import type { Job } from '#shared/jobs/job-schema';
+import { readJob } from '#shared/jobs/jobs-endpoints';
+import type { RateCard } from '#shared/rate-cards/rate-card';
+import { readRateCard } from '#shared/rate-cards/rate-cards-endpoints';
+import { Api } from '../core/api/api';
+import type { ReadEstimate } from './draft/read-estimate';
+
+/** The calls the workspace of an estimate makes. */
+@Injectable({ providedIn: 'root' })
+export class EstimateClient {
+  private readonly api = inject(Api);
+
+  read(estimateId: string): Promise<ReadEstimate> {
+    return this.api.call(readEstimate, { params: { estimateId } });
+  }
+
+  job(jobId: string, signal: AbortSignal): Promise<Job> {
+    return this.api.call(readJob, { params: { jobId }, signal });
+  }
+
+  async card(rateCardId: string, signal: AbortSignal): Promise<RateCard> {
+    return (await this.api.call(readRateCard, { params: { rateCardId }, signal })).content;
+  }
+
+  async issues(estimateId: string, signal: AbortSignal): Promise<readonly PricedIssueSummary[]> {
+    return (await this.api.call(listIssues, { params: { estimateId }, signal })).items;
+  }
+
+  change(estimateId: string, changes: readonly Change[]): Promise<KeptChanges> {
+    const body = { changes } as BodyOf<typeof changeEstimate>;
+    return this.api.call(changeEstimate, { params: { estimateId }, body });
+  }
+
+  takeCard(estimateId: string, version: number): Promise<CostedEstimate> {
+    return this.api.call(takeRateCard, { params: { estimateId }, version });
+  }
+
+  /** Nobody's hand makes this call: it keeps no session alive. */
+  presence(estimateId: string): Promise<AnswerOf<typeof tellPresence>> {
+    return this.api.call(tellPresence, { params: { estimateId }, unattended: true });
+  }
+}

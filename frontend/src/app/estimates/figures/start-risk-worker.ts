@@ -1,0 +1,1 @@
+export const startRiskWorker = (): Worker => new Worker(new URL('./risk-worker', import.meta.url));

@@ -1,0 +1,121 @@
+import { Injectable, inject } from '@angular/core';
+import type { Member, MemberContent, Piece } from '#shared/estimates/member';
+import { mirrored } from '#shared/measure/mirrored';
+import type { Shape } from '#shared/measure/shape';
+import { newId } from '../../core/new-id';
+import { Notices } from '../../core/problems/notices';
+import type { Edit } from '../draft/edit';
+import { EstimateStore } from '../estimate-store';
+import { copiedMember } from './copied-member';
+import { MemberSelection } from './member-selection';
+import { newMember } from './new-member';
+import { placeBetween } from './place-between';
+
+const contentOf = ({ id: _id, ...content }: Member): MemberContent => content;
+
+/** What one does with whole members and pieces: each is one step of undo and one request. */
+@Injectable()
+export class MemberActions {
+  private readonly store = inject(EstimateStore);
+  private readonly selection = inject(MemberSelection);
+  private readonly notices = inject(Notices);
+
+  /** Members of a piece, in working order. */
+  of(pieceId: string): readonly Member[] {
+    return this.store.members().filter((member) => member.pieceId === pieceId);
+  }
+
+  addPiece(name: string): string {
+    const id = newId();
+    const place = placeBetween(this.store.pieces().at(-1), undefined);
+    this.store.apply([{ kind: 'piece', id, content: { name, place, note: '' } }]);
+    return id;
+  }
+
+  /** A new member of a shape at the end of a piece; in an empty estimate a first piece comes with it. */
+  add(shape: Shape, name: string, pieceId = this.selection.member()?.pieceId ?? this.store.pieces().at(0)?.id): void {
+    const [id, home] = [newId(), pieceId ?? newId()];
+    const piece: Edit[] = pieceId
+      ? []
+      : [{ kind: 'piece', id: home, content: { name: $localize`Base`, place: 0, note: '' } }];
+    const place = placeBetween(this.of(home).at(-1), undefined);
+    const timberId = this.selection.member()?.timberId ?? this.store.card()?.carving.timbers.at(0)?.id ?? '';
+    const content = newMember({ pieceId: home, place, timberId, name, shape });
+    this.store.apply([...piece, { kind: 'member', id, content }]);
+    this.selection.select(id);
+  }
+
+  duplicate(member: Member): void {
+    this.insertAfter(member, copiedMember(contentOf(member)));
+  }
+
+  /** The other hand, beside the first. */
+  mirror(member: Member): void {
+    const copy = copiedMember(contentOf(member));
+    this.insertAfter(member, {
+      ...copy,
+      shape: mirrored(copy.shape),
+      name: $localize`${member.name}:name:, other hand`,
+    });
+  }
+
+  remove(member: Member): void {
+    const next = this.nextTo(member);
+    this.store.apply([{ kind: 'member', id: member.id, content: null }]);
+    if (next) this.selection.select(next.id);
+    else this.selection.showList();
+    this.offerUndo($localize`${member.name}:name: is removed.`);
+  }
+
+  /** A piece goes with its members. */
+  removePiece(piece: Piece): void {
+    const members = this.of(piece.id).map(({ id }): Edit => ({ kind: 'member', id, content: null }));
+    this.store.apply([...members, { kind: 'piece', id: piece.id, content: null }]);
+    this.offerUndo($localize`${piece.name}:name: is removed.`);
+  }
+
+  /** One place up or down, into the next piece at the end of one. */
+  shift(member: Member, by: -1 | 1): void {
+    const own = this.of(member.pieceId);
+    const to = own.findIndex(({ id }) => id === member.id) + by;
+    if (to >= 0 && to < own.length) return this.move(member, member.pieceId, to);
+    const pieces = this.store.pieces();
+    const piece = pieces.at(pieces.findIndex(({ id }) => id === member.pieceId) + by);
+    const isEdge = to < 0 ? pieces.at(0)?.id === member.pieceId : pieces.at(-1)?.id === member.pieceId;
+    if (piece && !isEdge) this.move(member, piece.id, by === 1 ? 0 : this.of(piece.id).length);
+  }
+
+  /** To a place in a piece, counted without the member itself. */
+  move(member: Member, pieceId: string, index: number): void {
+    const others = this.of(pieceId).filter(({ id }) => id !== member.id);
+    const place = placeBetween(others.at(index - 1 < 0 ? others.length : index - 1), others.at(index));
+    this.store.apply([{ kind: 'member', id: member.id, content: { ...contentOf(member), pieceId, place } }]);
+  }
+
+  /** Several new members at the end of a piece, pasted from a spreadsheet. */
+  insert(contents: readonly MemberContent[]): void {
+    const edits = contents.map((content): Edit => ({ kind: 'member', id: newId(), content }));
+    this.store.apply(edits);
+    const first = edits.at(0);
+    if (first) this.selection.select(first.id);
+  }
+
+  private insertAfter(member: Member, content: MemberContent): void {
+    const own = this.of(member.pieceId);
+    const index = own.findIndex(({ id }) => id === member.id);
+    const id = newId();
+    const place = placeBetween(member, own.at(index + 1));
+    this.store.apply([{ kind: 'member', id, content: { ...content, place } }]);
+    this.selection.select(id);
+  }
+
+  private nextTo(member: Member): Member | undefined {
+    const members = this.store.members();
+    const index = members.findIndex(({ id }) => id === member.id);
+    return members.at(index + 1) ?? (index > 0 ? members.at(index - 1) : undefined);
+  }
+
+  private offerUndo(text: string): void {
+    this.notices.say(text, { label: $localize`Undo`, run: () => void this.store.undo() });
+  }
+}

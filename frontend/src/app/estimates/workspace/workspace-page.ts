@@ -1,0 +1,21 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import type { OpenEstimate } from '../estimate-store';
+import { Workspace } from './workspace';
+
+/** The page of one estimate. Another estimate is another workspace: nothing of the first stays. */
+@Component({
+  selector: 'app-workspace-page',
+  imports: [Workspace],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    @for (opened of [open()]; track opened.estimateId) {
+      <app-workspace [open]="opened" />
+    }
+  `,
+})
+export class WorkspacePage {
+  readonly jobId = input.required<string>();
+  readonly estimateId = input.required<string>();
+
+  protected readonly open = computed<OpenEstimate>(() => ({ jobId: this.jobId(), estimateId: this.estimateId() }));
+}
