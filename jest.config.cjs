@@ -2,7 +2,12 @@ const { createCjsPreset } = require('jest-preset-angular/presets');
 
 const swc = (parser) => [
   '@swc/jest',
-  { jsc: { target: 'es2022', parser, keepClassNames: true }, module: { type: 'commonjs' }, sourceMaps: 'inline', swcrc: false },
+  {
+    jsc: { target: 'es2022', parser, keepClassNames: true },
+    module: { type: 'commonjs' },
+    sourceMaps: 'inline',
+    swcrc: false,
+  },
 ];
 
 const node = (name) => ({
@@ -36,6 +41,9 @@ module.exports = {
     },
     onDatabase('backend'),
     node('shared'),
-    onDatabase('test'),
+    node('test/architecture'),
+    node('test/benchmarks'),
+    node('test/reference'),
+    ...['api', 'repositories'].map((folder) => onDatabase(`test/${folder}`)),
   ],
 };

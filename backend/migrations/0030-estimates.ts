@@ -77,6 +77,12 @@ export const estimates = migration('0030-estimates', [
     UNIQUE KEY issues_of_estimate (workshop_id, estimate_id, sequence),
     CONSTRAINT issues_of_estimate FOREIGN KEY (workshop_id, estimate_id) REFERENCES estimates (workshop_id, id)
   ) ENGINE=InnoDB`,
+  `CREATE OR REPLACE TRIGGER issues_stay_as_issued BEFORE UPDATE ON issues FOR EACH ROW
+    IF NOT (OLD.workshop_id <=> NEW.workshop_id AND OLD.id <=> NEW.id AND OLD.estimate_id <=> NEW.estimate_id AND OLD.sequence <=> NEW.sequence AND OLD.letter <=> NEW.letter AND OLD.issued_at <=> NEW.issued_at AND OLD.issued_by <=> NEW.issued_by AND OLD.note <=> NEW.note AND OLD.valid_until <=> NEW.valid_until AND OLD.leaf_valid_until <=> NEW.leaf_valid_until AND OLD.net_minor <=> NEW.net_minor AND OLD.tax_minor <=> NEW.tax_minor AND OLD.gross_minor <=> NEW.gross_minor AND OLD.calculator_version <=> NEW.calculator_version AND OLD.snapshot <=> NEW.snapshot AND OLD.sha256 <=> NEW.sha256) THEN
+      SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'an issue stays as it was issued';
+    END IF`,
+  `CREATE OR REPLACE TRIGGER issues_are_kept BEFORE DELETE ON issues FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'an issue is kept'`,
   `CREATE TABLE IF NOT EXISTS issue_papers (
     workshop_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
     id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,

@@ -1,5 +1,6 @@
 import * as z from 'zod';
-import { figuresSchema, pricedFiguresSchema, workFiguresSchema } from '#shared/estimates/figures-schema';
+import { figuresSchema, pricedFiguresSchema } from '#shared/estimates/figures-schema';
+import { workFiguresSchema } from '#shared/estimates/work-figures-schema';
 import { memberContentSchema, pieceContentSchema } from '#shared/estimates/member-schema';
 import { settingsSchema } from '#shared/estimates/settings-schema';
 import { identifier, instant, version } from '#shared/problems/entry-schema';

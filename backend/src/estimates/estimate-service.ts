@@ -142,6 +142,12 @@ export class EstimateService {
     return presentEstimate(whole, figures, 'cost') as CostedEstimate;
   }
 
+  /** An issue raises the draft's version too, so that what was seen once is issued once. */
+  async followIssue({ workshopId, id, version }: EstimateRow, letter: string): Promise<void> {
+    await this.parts.estimates.change(workshopId, { id, version }, { letter, changedAt: this.parts.clock.now() });
+    await this.refresh(workshopId, id);
+  }
+
   private async raise(estimate: EstimateRow, settings: EstimateRow['settings'] | null): Promise<void> {
     const { workshopId, id, version, settingsVersion } = estimate;
     const changed = settings ? { settings, settingsVersion: settingsVersion + 1 } : {};

@@ -4,7 +4,7 @@ import { audienceOf } from '#shared/actor/role';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import type { CostedEstimate, PricedEstimate } from '#shared/estimates/estimate-schema';
 import { issueLetter } from '#shared/estimates/issue-letter';
-import type { IssueState, Paper } from '#shared/estimates/issue-schema';
+import type { Paper } from '#shared/estimates/issue-schema';
 import { lineDifferences, type LineDifference, type NamedLines } from '#shared/estimates/line-differences';
 import type { Snapshot } from '#shared/estimates/snapshot';
 import { Rejection } from '#shared/problems/rejection';
@@ -76,7 +76,7 @@ export class IssueService {
     const row = await this.keep(actor, snapshot, (before?.sequence ?? 0) + 1);
     if (before && (before.state === 'issued' || before.state === 'sent'))
       await this.parts.issues.markAs(workshopId, before.id, 'replaced');
-    await this.parts.estimates.write(workshopId, estimateId, { letter: row.letter });
+    await this.parts.drafts.followIssue(whole.estimate, row.letter);
     const values = { letter: row.letter, number: whole.estimate.number };
     await this.parts.audit.record(actor, {
       subject: { kind: 'issue', id: row.id },
@@ -100,7 +100,7 @@ export class IssueService {
     const issued = dayOfInstant(issue.issuedAt.getTime(), timeZone);
     mayBeMarked(issue, mark, { issued, today: await this.parts.cards.today(workshopId) });
     const row = await this.parts.issues.mark(workshopId, id, {
-      state: mark.state as IssueState,
+      state: mark.state,
       markedOn: mark.day,
       markNote: mark.note,
     });

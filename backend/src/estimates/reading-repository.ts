@@ -17,6 +17,6 @@ export class ReadingRepository {
 
   async put(workshopId: string, rows: readonly Omit<ReadingRow, 'workshopId'>[]): Promise<void> {
     const whole = rows.map((row) => ({ ...row, workshopId }));
-    await this.table.bulkCreate(whole as never, { updateOnDuplicate: ['version', 'calculatorVersion', 'bytes'] });
+    await this.table.bulkCreate(whole, { updateOnDuplicate: ['version', 'calculatorVersion', 'bytes'] });
   }
 }

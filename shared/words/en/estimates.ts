@@ -7,7 +7,7 @@ export const estimates = {
   'issue-draft-changed': 'The estimate was changed since you last saw it. Look at it once more before issuing.',
   'issue-card-old':
     'This estimate is worked on a rate card that is no longer in force. Take the new card, or say that the old one is meant.',
-  'issue-refused': 'The estimate cannot be issued as it stands: {reason}',
+  'issue-refused': 'The estimate cannot be issued as it stands. What stops it is listed with it.',
   'issue-empty': 'There is nothing in this estimate yet.',
   'issue-replaced': 'Issue {letter} was replaced by a later one.',
   'issue-decided': 'Issue {letter} was {state} already.',
