@@ -256,7 +256,7 @@ describe('issuing', () => {
         return reached === failing ? Promise.reject(new Error('cut off')) : query(...parts);
       }) as typeof sequelize.query;
       const response = await issue(sample, randomUUID(), version);
-      sequelize.query = query as typeof sequelize.query;
+      sequelize.query = query;
       const issues = await api.app.estimates.issues.ofEstimate(api.ours.id, sample.estimateId);
       const { estimate } = await api.app.estimates.drafts.whole(api.ours.id, sample.estimateId);
       const isIssued = response.status === 200;

@@ -2,60 +2,53 @@ import { randomInt } from 'node:crypto';
 import { v7 as newId } from 'uuid';
 import { beginEstimate, changeEstimate } from '#shared/estimates/estimates-endpoints';
 import type { Change } from '#shared/estimates/change-schema';
-import type { MemberContent } from '#shared/estimates/member';
+import type { MemberContent, MemberOrnament, Zone } from '#shared/estimates/member';
 import { keepClient } from '#shared/jobs/clients-endpoints';
 import { keepJob } from '#shared/jobs/jobs-endpoints';
 import type { TestWorkshop } from './start-api';
 
+const sampleZone = (id: string): Zone => ({
+  id,
+  name: 'Face',
+  take: { way: 'share', share_percent: 100 },
+  relief: 'middle',
+  finish: null,
+  buildUpId: 'water-burnished',
+  leafId: 'gold-23-5-loose',
+  laying: { way: 'proposed', strips: null, cuts: null },
+  chosenStepIds: [],
+  burnished_percent: null,
+  painted_percent: 0,
+  recutting: null,
+  protectedEdge_mm: 0,
+  alternativeId: null,
+});
+
+const sampleRun = (zoneId: string): MemberOrnament => ({
+  id: newId(),
+  ornamentId: 'egg-and-dart',
+  extent: { way: 'run', run_mm: 1200, runs: 1, mitreLeaf_mm: 0, mitreLeaves: 0, centre_mm: null },
+  size_mm: null,
+  relief: 'middle',
+  isUndercut: false,
+  plan: 'straight',
+  isMirrored: false,
+  joinsLearning: false,
+  hasOwnPattern: false,
+  zoneId,
+  alternativeId: null,
+});
+
 /** A gilt frieze with one zone and one carved run, as an estimator would enter it. */
 export function sampleMember(pieceId: string, name: string): MemberContent {
-  const zoneId = newId();
+  const zone = sampleZone(newId());
   return {
-    pieceId,
-    place: 1,
-    name,
-    count: 2,
-    timberId: 'lime',
+    ...{ pieceId, place: 1, name, count: 2, timberId: 'lime' },
     shape: { kind: 'rectangle', length_mm: 1200, height_mm: 150 },
     openings: [],
-    zones: [
-      {
-        id: zoneId,
-        name: 'Face',
-        take: { way: 'share', share_percent: 100 },
-        relief: 'middle',
-        finish: null,
-        buildUpId: 'water-burnished',
-        leafId: 'gold-23-5-loose',
-        laying: { way: 'proposed', strips: null, cuts: null },
-        chosenStepIds: [],
-        burnished_percent: null,
-        painted_percent: 0,
-        recutting: null,
-        protectedEdge_mm: 0,
-        alternativeId: null,
-      },
-    ],
-    ornaments: [
-      {
-        id: newId(),
-        ornamentId: 'egg-and-dart',
-        extent: { way: 'run', run_mm: 1200, runs: 1, mitreLeaf_mm: 0, mitreLeaves: 0, centre_mm: null },
-        size_mm: null,
-        relief: 'middle',
-        isUndercut: false,
-        plan: 'straight',
-        isMirrored: false,
-        joinsLearning: false,
-        hasOwnPattern: false,
-        zoneId,
-        alternativeId: null,
-      },
-    ],
-    lot: '',
-    note: '',
-    typed: {},
-    alternativeId: null,
+    zones: [zone],
+    ornaments: [sampleRun(zone.id)],
+    ...{ lot: '', note: '', typed: {}, alternativeId: null },
   };
 }
 

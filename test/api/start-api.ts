@@ -10,7 +10,7 @@ import { openPlatform } from '../../backend/src/platform/open-platform';
 import type { Platform } from '../../backend/src/platform/platform';
 import { freshDatabase } from '../database/fresh-database';
 import { MovingClock } from './moving-clock';
-import { addPerson, canary, openWorkshop, type TestPerson, type TestWorkshop } from './test-workshop';
+import { addPerson, canary, openWorkshop, type Door, type TestPerson, type TestWorkshop } from './test-workshop';
 import { Visitor } from './visitor';
 
 export { canary, password, type TestPerson, type TestWorkshop } from './test-workshop';
@@ -60,17 +60,23 @@ async function openParts(environment: Environment) {
   return { platform, clock, logLines, catcher, app: openApp(platform, catcher), stop };
 }
 
+const openWorkshops = async (door: Door) => ({
+  ours: await openWorkshop(door, 'Herons'),
+  theirs: await openWorkshop(door, canary),
+});
+
 /** Starts it; `environment` overrides settings, `headers` go with all that the signed-in people ask. */
 export async function startApi(environment: Environment = {}, headers: Environment = {}): Promise<Api> {
   const { catcher, ...parts } = await openParts(environment);
   const { app, platform } = parts;
-  const ours = await openWorkshop({ app, platform, headers }, 'Herons');
-  const theirs = await openWorkshop({ app, platform, headers }, canary);
+  const workshops = await openWorkshops({ app, platform, headers }).catch(async (error: unknown) => {
+    await parts.stop();
+    throw error;
+  });
   return {
     ...parts,
-    ours,
-    theirs,
-    as: (role) => ours.people[role].visitor,
+    ...workshops,
+    as: (role) => workshops.ours.people[role].visitor,
     newcomer: (workshop, role) => addPerson({ app, platform, headers }, { workshop, role }),
     stranger: (own) => new Visitor(app.web.express, own ?? headers).arrive(),
     mails: async () => {
