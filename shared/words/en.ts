@@ -1,5 +1,7 @@
 import { accounts } from '#shared/words/en/accounts';
 import { buildups } from '#shared/words/en/buildups';
+import { cardChoices } from '#shared/words/en/card-choices';
+import { cardTables } from '#shared/words/en/card-tables';
 import { carving } from '#shared/words/en/carving';
 import { documents } from '#shared/words/en/documents';
 import { drying } from '#shared/words/en/drying';
@@ -26,6 +28,8 @@ export const en = {
   ...leaf,
   ...buildups,
   ...drying,
+  ...cardTables,
+  ...cardChoices,
   ...rateCards,
   ...jobs,
   ...estimates,
