@@ -3,7 +3,7 @@ import { systemOrderFindings } from '#shared/buildups/system-order-findings';
 import type { Span } from '#shared/drying/free-span';
 import type { LotSequence, SequenceStep } from '#shared/drying/lot-sequence';
 import { placedInPortions, type PlacedTask } from '#shared/drying/placed-in-portions';
-import type { PlacedCoat } from '#shared/drying/placed-block';
+import type { BusyGrades, PlacedCoat } from '#shared/drying/placed-block';
 import { stepBlocks } from '#shared/drying/step-blocks';
 import { dayLength_minutes } from '#shared/drying/day-length-minutes';
 import { endOfWork } from '#shared/drying/end-of-work';
@@ -38,7 +38,7 @@ export interface JobSequence {
 }
 
 interface Plan {
-  readonly taken: Map<string, Span[]>;
+  busy: BusyGrades;
   /** When gilding in water is done and protected, by piece: oily size waits for it. */
   readonly waterDone: Map<string, number>;
   readonly tasks: PlacedTask[];
@@ -68,14 +68,6 @@ function earliest(lot: LotSequence, at: { request: JobRequest; plan: Plan; place
 const endOf = (placed: readonly PlacedCoat[]): number =>
   Math.max(0, ...placed.map((one) => one.end_minutes + one.step.opens_minutes));
 
-function take(plan: Plan, tasks: readonly PlacedTask[]): void {
-  for (const task of tasks) {
-    if (task.end_minutes === task.start_minutes) continue;
-    plan.taken.set(task.step.gradeId, [...(plan.taken.get(task.step.gradeId) ?? []), task]);
-  }
-  plan.tasks.push(...tasks);
-}
-
 /** The steps after which nothing of gilding in water is left to do. */
 const waterSteps = ['lay', 'fault', 'second-laying', 'burnish', 'matte-size', 'protect-edge'];
 
@@ -83,11 +75,12 @@ function placeLot(lot: LotSequence, request: JobRequest, plan: Plan): LotSpan {
   const placed: PlacedTask[] = [];
   for (const block of stepBlocks(lot.steps)) {
     const notBefore = earliest(lot, { request, plan, placed });
-    const placing = { time: request.time, taken: (gradeId: string) => plan.taken.get(gradeId) ?? [], notBefore };
+    const placing = { time: request.time, busy: plan.busy, notBefore };
     const from_minutes = Math.max(endOf(placed), request.ready_minutes[lot.lotId] ?? 0);
-    const { tasks, findings } = placedInPortions(block, { lotId: lot.lotId, from_minutes, placing });
+    const { tasks, busy, findings } = placedInPortions(block, { lotId: lot.lotId, from_minutes, placing });
     placed.push(...tasks);
-    take(plan, tasks);
+    plan.tasks.push(...tasks);
+    plan.busy = busy;
     plan.findings.push(...findings);
   }
   if (lot.system === 'water') waterIsDone(lot.pieceId, placed, plan);
@@ -122,7 +115,7 @@ function lotSpan(
  * overlapped by other lots' work, holds waited for, windows kept by choosing the start or working in portions. Elapsed minutes, working days and weeks.
  */
 export function jobSequence(request: JobRequest): JobSequence {
-  const plan: Plan = { taken: new Map(), waterDone: new Map(), tasks: [], findings: systemOrderFindings(request.lots) };
+  const plan: Plan = { busy: new Map(), waterDone: new Map(), tasks: [], findings: systemOrderFindings(request.lots) };
   const lots = request.lots.map((lot) => placeLot(lot, request, plan));
   const elapsed_minutes = Math.max(0, ...lots.map((lot) => lot.end_minutes));
   return {

@@ -1,4 +1,4 @@
-import { freeSpan, type Span } from '#shared/drying/free-span';
+import { type BusySpans, freeSpan, type Span } from '#shared/drying/free-span';
 import type { SequenceStep } from '#shared/drying/lot-sequence';
 import type { WorkingTime } from '#shared/drying/working-time';
 import { countUp } from '#shared/money/settled';
@@ -10,14 +10,23 @@ export interface PlacedCoat extends Span {
   readonly handsOn_minutes: number;
 }
 
+/** When each grade is busy. */
+export type BusyGrades = ReadonlyMap<string, BusySpans>;
+
 /** What placing needs to know: where each grade is busy, how early each step may start, and into how many portions the work is split. */
 export interface Placing {
   readonly time: WorkingTime;
-  readonly taken: (gradeId: string) => readonly Span[];
+  readonly busy: BusyGrades;
   readonly notBefore: (step: SequenceStep) => number;
   readonly portions: number;
   /** False lays the work down although a limit is passed. */
   readonly keepsLimits: boolean;
+}
+
+/** The coats of a block as far as they were laid, and whether all of them are, inside their limits. */
+export interface PlacedBlock {
+  readonly coats: readonly PlacedCoat[];
+  readonly isWhole: boolean;
 }
 
 const clockMinutes = (handsOn_minutes: number, { productiveShare_percent }: WorkingTime): number =>
@@ -77,26 +86,23 @@ function placedCoat(step: SequenceStep, coat: number, at: { limits: Limits; plac
   const { limits, placing } = at;
   const handsOn_minutes = countUp(step.handsOn_minutes / step.coats / placing.portions);
   const wanted = { from_minutes: limits.from_minutes, work_minutes: clockMinutes(handsOn_minutes, placing.time) };
-  return { step, coat, handsOn_minutes, ...freeSpan(placing.taken(step.gradeId), wanted, placing.time) };
+  return { step, coat, handsOn_minutes, ...freeSpan(placing.busy.get(step.gradeId) ?? [], wanted, placing.time) };
 }
 
 const keeps = (one: PlacedCoat, limits: Limits, finish: number): boolean =>
   one.start_minutes <= limits.startBy_minutes && one.end_minutes <= Math.min(limits.endBy_minutes, finish);
 
-/** Lays the coats of a block into the week from a moment on, one after another as early as they may; null where a limit would be passed. */
-export function placedBlock(
-  steps: readonly SequenceStep[],
-  from_minutes: number,
-  placing: Placing,
-): PlacedCoat[] | null {
-  const placed: PlacedCoat[] = [];
+/** Lays the coats of a block into the week from a moment on, one after another as early as they may, up to the first that passes a limit. */
+export function placedBlock(steps: readonly SequenceStep[], from_minutes: number, placing: Placing): PlacedBlock {
+  const coats: PlacedCoat[] = [];
   for (const step of steps) {
+    const notBefore_minutes = Math.max(from_minutes, placing.notBefore(step));
     for (let coat = 1; coat <= step.coats; coat += 1) {
-      const limits = limitsOf(step, coat, { placed, from_minutes: Math.max(from_minutes, placing.notBefore(step)) });
+      const limits = limitsOf(step, coat, { placed: coats, from_minutes: notBefore_minutes });
       const one = placedCoat(step, coat, { limits, placing });
-      placed.push(one);
-      if (placing.keepsLimits && !keeps(one, limits, finishBy(step, placed))) return null;
+      coats.push(one);
+      if (placing.keepsLimits && !keeps(one, limits, finishBy(step, coats))) return { coats, isWhole: false };
     }
   }
-  return placed;
+  return { coats, isWhole: true };
 }

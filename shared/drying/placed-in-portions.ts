@@ -1,4 +1,5 @@
-import { placedBlock, type PlacedCoat, type Placing } from '#shared/drying/placed-block';
+import { busyWith } from '#shared/drying/free-span';
+import { type BusyGrades, placedBlock, type PlacedCoat, type Placing } from '#shared/drying/placed-block';
 import type { StepBlock } from '#shared/drying/step-blocks';
 import { dayLength_minutes } from '#shared/drying/day-length-minutes';
 import { nextWorkingMinute } from '#shared/drying/next-working-minute';
@@ -17,61 +18,85 @@ export interface BlockAt {
   readonly placing: Omit<Placing, 'portions' | 'keepsLimits'>;
 }
 
+/** The stretches of work of a block, and when each grade is busy with them too. */
 interface Placed {
   readonly tasks: readonly PlacedTask[];
-  readonly findings: readonly Finding[];
+  readonly busy: BusyGrades;
 }
 
-/** Starts are tried at every quarter of an hour of work for three weeks; more than 60 portions are no plan any more. */
+/** Starts are tried at every quarter of an hour of work; more than 60 portions are no plan any more. */
 const tryEvery_minutes = 15;
-const tryFor_minutes = 21 * dayLength_minutes;
+const week_minutes = 7 * dayLength_minutes;
 const mostPortions = 60;
 
-function firstFit(block: StepBlock, from_minutes: number, placing: Placing): PlacedCoat[] | null {
-  let start = nextWorkingMinute(from_minutes, placing.time);
-  while (start <= from_minutes + tryFor_minutes) {
-    const placed = placedBlock(block.steps, start, placing);
-    if (placed) return placed;
-    start = nextWorkingMinute(start + tryEvery_minutes, placing.time);
+/** The earliest start up to a moment from which a block keeps its limits; whatever starts at the same time is tried once. */
+function firstFit(block: StepBlock, span: { from: number; to: number }, placing: Placing): PlacedCoat[] | null {
+  let start = nextWorkingMinute(span.from, placing.time);
+  while (start <= span.to) {
+    const { coats, isWhole } = placedBlock(block.steps, start, placing);
+    if (isWhole) return [...coats];
+    const tried = coats[0]?.start_minutes ?? start;
+    start = nextWorkingMinute(tried + tryEvery_minutes, placing.time);
   }
   return null;
 }
 
-/** Each portion keeps clear of those before it, whoever does them. */
-function allPortions(block: StepBlock, at: BlockAt, portions: number): PlacedTask[] | null {
+/** Whether hands with nothing else to do could keep the limits of one portion, on whatever day of the week they start. */
+function isPossible(block: StepBlock, portions: number, { time }: BlockAt['placing']): boolean {
+  const placing: Placing = { time, busy: new Map(), notBefore: () => 0, portions, keepsLimits: true };
+  return firstFit(block, { from: 0, to: week_minutes }, placing) !== null;
+}
+
+function fewestPortions(block: StepBlock, { placing }: BlockAt): number | null {
+  for (let portions = 1; portions <= (block.inPortions ? mostPortions : 1); portions += 1)
+    if (isPossible(block, portions, placing)) return portions;
+  return null;
+}
+
+const withTasks = (busy: BusyGrades, tasks: readonly PlacedCoat[]): BusyGrades => {
+  const grades = new Map(busy);
+  for (const task of tasks) grades.set(task.step.gradeId, busyWith(grades.get(task.step.gradeId) ?? [], task));
+  return grades;
+};
+
+/** By when everybody is free again and nothing is waited for. */
+function freeFrom(block: StepBlock, from_minutes: number, { busy, notBefore }: Pick<Placing, 'busy' | 'notBefore'>) {
+  const ends = block.steps.map(({ gradeId }) => busy.get(gradeId)?.at(-1)?.end_minutes ?? 0);
+  return Math.max(from_minutes, ...ends, ...block.steps.map(notBefore));
+}
+
+/** Each portion keeps clear of those before it, whoever does them, and waits for free hands as long as it takes. */
+function allPortions(block: StepBlock, at: BlockAt, portions: number): Placed | null {
   const tasks: PlacedTask[] = [];
-  let from_minutes = at.from_minutes;
+  let { busy } = at.placing;
+  let { from_minutes } = at;
   for (let portion = 1; portion <= portions; portion += 1) {
-    const taken = (gradeId: string) => [
-      ...at.placing.taken(gradeId),
-      ...tasks.filter((task) => task.step.gradeId === gradeId),
-    ];
-    const placed = firstFit(block, from_minutes, { ...at.placing, taken, portions, keepsLimits: true });
-    if (!placed) return null;
-    tasks.push(...placed.map((coat) => ({ ...coat, lotId: at.lotId, portion })));
-    from_minutes = placed[0]?.start_minutes ?? from_minutes;
+    const placing: Placing = { ...at.placing, busy, portions, keepsLimits: true };
+    const span = { from: from_minutes, to: freeFrom(block, from_minutes, placing) + week_minutes };
+    const coats = firstFit(block, span, placing);
+    if (!coats) return null;
+    tasks.push(...coats.map((coat) => ({ ...coat, lotId: at.lotId, portion })));
+    busy = withTasks(busy, coats);
+    from_minutes = coats[0]?.start_minutes ?? from_minutes;
   }
-  return tasks;
+  return { tasks, busy };
 }
 
 const nameOf = (block: StepBlock): string => block.steps[0]?.name ?? '';
 
-function overTime(block: StepBlock, at: BlockAt): Placed {
-  const placed = placedBlock(block.steps, at.from_minutes, { ...at.placing, portions: 1, keepsLimits: false }) ?? [];
+function overTime(block: StepBlock, at: BlockAt): Placed & { findings: Finding[] } {
+  const { coats } = placedBlock(block.steps, at.from_minutes, { ...at.placing, portions: 1, keepsLimits: false });
   const finding: Finding = { kind: 'warn', code: 'drying-no-window', values: { step: nameOf(block) }, about: at.lotId };
-  return { tasks: placed.map((coat) => ({ ...coat, lotId: at.lotId, portion: 1 })), findings: [finding] };
+  const tasks = coats.map((coat) => ({ ...coat, lotId: at.lotId, portion: 1 }));
+  return { tasks, busy: withTasks(at.placing.busy, coats), findings: [finding] };
 }
 
 /** Lays a block into the week in the fewest portions that keep its limits, and says so when they are several, or when none keeps them. */
-export function placedInPortions(block: StepBlock, at: BlockAt): Placed {
-  for (let portions = 1; portions <= (block.inPortions ? mostPortions : 1); portions += 1) {
-    const tasks = allPortions(block, at, portions);
-    if (!tasks) continue;
-    if (portions === 1) return { tasks, findings: [] };
-    return {
-      tasks,
-      findings: [{ kind: 'note', code: 'drying-portions', values: { step: nameOf(block), portions }, about: at.lotId }],
-    };
-  }
-  return overTime(block, at);
+export function placedInPortions(block: StepBlock, at: BlockAt): Placed & { readonly findings: readonly Finding[] } {
+  const portions = fewestPortions(block, at);
+  const placed = portions === null ? null : allPortions(block, at, portions);
+  if (!placed) return overTime(block, at);
+  if (portions === 1) return { ...placed, findings: [] };
+  const values = { step: nameOf(block), portions: portions ?? 1 };
+  return { ...placed, findings: [{ kind: 'note', code: 'drying-portions', values, about: at.lotId }] };
 }

@@ -17,8 +17,12 @@ function reach(steps: readonly SequenceStep[], at: number): number {
 }
 
 const isPortioned = (steps: readonly SequenceStep[]): boolean =>
-  steps.length > 1 &&
-  steps.some((step) => step.endsInWindow || step.lags.some((lag) => lag.finishedWithin_minutes !== null));
+  steps.some(
+    (step) =>
+      step.wholeWithin_minutes !== null ||
+      step.endsInWindow ||
+      step.lags.some((lag) => lag.finishedWithin_minutes !== null),
+  );
 
 /** The steps of a lot in blocks, in working order: a window ties the next step to its step, a limit from start to finish all steps up to the one it names. */
 export function stepBlocks(steps: readonly SequenceStep[]): StepBlock[] {
