@@ -1,0 +1,95 @@
+import type { Snapshot } from '#shared/estimates/snapshot';
+import { addressBlock } from '../address-block';
+import { letterheadBlock, printableLogo } from '../letterhead';
+import { finishedPaper } from '../paper/finished-paper';
+import type { Block } from '../paper/flow';
+import type { Pdf } from '../paper/open-paper';
+import { textStyles } from '../paper/paper-look';
+import { sectionBlocks } from '../paper/section-blocks';
+import { textBlock } from '../paper/text-block';
+import type { WordCode } from '#shared/words/word-code';
+import { acceptanceBlocks } from './acceptance-block';
+import { careBlocks, cautionBlocks } from './advice-blocks';
+import { alternativesBlocks } from './alternatives-table';
+import { buildUpBlocks, memberDrawingBlocks } from './drawing-blocks';
+import { holdingBlocks } from './holding-blocks';
+import { issueContent, type IssueContent } from './issue-content';
+import { paymentBlocks } from './payment-table';
+import { priceTable } from './price-table';
+import { timeBlocks } from './time-blocks';
+
+const titleOf = ({ snapshot }: IssueContent): string =>
+  snapshot.draft.settings.title.trim() === '' ? snapshot.job.title : snapshot.draft.settings.title;
+
+function addressOf(pdf: Pdf, { snapshot, words }: IssueContent): Block {
+  const { client, job, issuedOn, validUntil, issuedBy, estimate } = snapshot;
+  return addressBlock(pdf, {
+    address: [client.name, client.contact, client.address],
+    particulars: [
+      [words.say('paper-estimate'), words.say('paper-number-letter', { ...estimate })],
+      [words.say('paper-date'), words.day(issuedOn)],
+      [words.say('paper-holds-until'), words.day(validUntil)],
+      [words.say('paper-job'), [job.number, job.title].filter(Boolean).join(', ')],
+      [words.say('paper-reference'), job.reference],
+      [words.say('paper-site'), job.site],
+      [words.say('paper-issued-by'), issuedBy],
+    ],
+  });
+}
+
+function textSection(pdf: Pdf, content: IssueContent, [heading, text]: readonly [WordCode, string]): Block[] {
+  return text.trim() === '' ? [] : sectionBlocks(pdf, content.words.say(heading), [textBlock(pdf, text)]);
+}
+
+function introduction(pdf: Pdf, content: IssueContent): Block[] {
+  const texts = [content.draft.settings.introduction, content.snapshot.note].filter((text) => text.trim() !== '');
+  return texts.map((text) => textBlock(pdf, text, { before_pt: 6 }));
+}
+
+function estimateBlocks(pdf: Pdf, content: IssueContent, logo: Buffer | null): Block[] {
+  const { snapshot, draft, words } = content;
+  const { included, excluded, terms } = draft.settings;
+  return [
+    letterheadBlock({ workshop: snapshot.workshop, logo: printableLogo(pdf, logo), words }),
+    addressOf(pdf, content),
+    textBlock(pdf, titleOf(content), { style: textStyles.title, tag: 'H1' }),
+    ...introduction(pdf, content),
+    ...sectionBlocks(pdf, words.say('paper-lines'), [priceTable(pdf, content)]),
+    ...alternativesBlocks(pdf, content),
+    ...textSection(pdf, content, ['paper-included', included]),
+    ...textSection(pdf, content, ['paper-excluded', excluded]),
+    ...timeBlocks(pdf, content),
+    ...paymentBlocks(pdf, content),
+    ...holdingBlocks(pdf, content),
+    ...buildUpBlocks(pdf, content),
+    ...memberDrawingBlocks(pdf, content),
+    ...careBlocks(pdf, content),
+    ...cautionBlocks(pdf, content),
+    ...textSection(pdf, content, ['paper-terms', terms]),
+    ...acceptanceBlocks(pdf, content),
+  ];
+}
+
+/** The estimate as its client receives it: prices and never a cost; equal content gives equal bytes. */
+export function estimatePaper(snapshot: Snapshot, logo: Buffer | null): Promise<Buffer> {
+  const content = issueContent(snapshot);
+  const { words } = content;
+  const { number, letter } = snapshot.estimate;
+  const title = words.say('paper-estimate-title', { number, letter });
+  return finishedPaper({
+    facts: {
+      title: words.say('paper-estimate-head', { number, letter, title: titleOf(content) }),
+      author: snapshot.workshop.name,
+      subject: words.say('paper-estimate-subject', { client: snapshot.client.name }),
+      language: words.language,
+      size: snapshot.workshop.paperSize === 'Letter' ? 'Letter' : 'A4',
+      madeAt: snapshot.issuedAt,
+    },
+    feet: {
+      head: words.say('paper-estimate-head', { number, letter, title: titleOf(content) }),
+      foot: `${snapshot.workshop.name} · ${title}`,
+      pageOf: (page, pages) => words.say('paper-page-of', { page, pages }),
+    },
+    blocks: (pdf) => estimateBlocks(pdf, content, logo),
+  });
+}

@@ -1,0 +1,38 @@
+import type { SnapshotWorkshop } from '#shared/estimates/snapshot';
+import { formatDay } from '#shared/calendar/format-day';
+import { currencyDigits } from '#shared/money/currency-digits';
+import type { MinorUnits } from '#shared/money/decimal';
+import { formatsFor } from '#shared/units/formats-for';
+import { en } from '#shared/words/en';
+import { say } from '#shared/words/say';
+import type { WordCode, WordValues } from '#shared/words/word-code';
+
+/** What a paper is worded with: the codes of the catalogue, and figures as the workshop writes them. */
+export interface PaperWords {
+  /** BCP 47 of the words themselves, whatever the workshop's locale. */
+  readonly language: string;
+  readonly say: (code: WordCode, values?: WordValues) => string;
+  readonly money: (amount_minor: MinorUnits) => string;
+  readonly length: (length_mm: number) => string;
+  /** Any other figure by the ending of its name: hours, percent, leaves … */
+  readonly figure: (unit: string, figure: number) => string;
+  readonly day: (day: string) => string;
+}
+
+/** Papers are worded in the one language there is; a workshop that writes English keeps its own kind of it. */
+const languageOf = (locale: string): string => (/^en\b/i.test(locale) ? locale : 'en-GB');
+
+/** The words of a workshop's papers. */
+export function paperWords(workshop: SnapshotWorkshop): PaperWords {
+  const { locale, currency, lengthUnit } = workshop;
+  const formats = formatsFor({ locale, currency, lengthUnit, digits: currencyDigits(currency) });
+  const language = languageOf(locale);
+  return {
+    language,
+    say: say(en, formats),
+    money: (amount_minor) => formats.write('minor', amount_minor),
+    length: (length_mm) => formats.write('mm', length_mm),
+    figure: (unit, figure) => formats.write(unit, figure),
+    day: (day) => formatDay(day, language),
+  };
+}

@@ -1,0 +1,70 @@
+import PDFDocument from 'pdfkit';
+import { paperFonts } from './paper-fonts';
+import { pageMargins, type PaperFont } from './paper-look';
+import { printableText } from './printable-text';
+
+/** What a paper is, apart from what stands on it. */
+export interface PaperFacts {
+  readonly title: string;
+  readonly author: string;
+  readonly subject: string;
+  /** BCP 47, of the words on the paper. */
+  readonly language: string;
+  readonly size: 'A4' | 'Letter';
+  /** Instant in UTC (ISO 8601). Nothing else in the file knows a time, so equal content is equal bytes. */
+  readonly madeAt: string;
+}
+
+export type Pdf = PDFKit.PDFDocument;
+
+/** The description inside the file is XML, which the library fills in as it stands. */
+function escapeDescription(pdf: Pdf): void {
+  const inner = pdf as unknown as { info: Record<string, unknown>; endMetadata: () => void };
+  const end = inner.endMetadata.bind(pdf);
+  const escaped = (text: unknown) => String(text).replace(/&/g, '&amp;').replace(/</g, '&lt;').replace(/>/g, '&gt;');
+  inner.endMetadata = () => {
+    for (const key of ['Title', 'Author', 'Subject']) inner.info[key] = escaped(inner.info[key]);
+    end();
+  };
+}
+
+/** A paper with no page yet: tagged, with its language and title, the fonts of the house embedded. */
+export function openPaper(facts: PaperFacts): Pdf {
+  const fonts = paperFonts();
+  const pdf = new PDFDocument({
+    size: facts.size === 'A4' ? 'A4' : 'LETTER',
+    margins: { ...pageMargins },
+    autoFirstPage: false,
+    bufferPages: true,
+    pdfVersion: '1.7',
+    // The library knows this part of ISO 14289, its types do not yet.
+    subset: 'PDF/UA' as 'PDF/A-2',
+    tagged: true,
+    displayTitle: true,
+    lang: facts.language,
+    // None of the standard fonts, which are not embedded, is ever touched.
+    font: '',
+    info: {
+      Title: printableText(facts.title),
+      Author: printableText(facts.author),
+      Subject: printableText(facts.subject),
+      Creator: 'Bolewright',
+      Producer: 'Bolewright',
+      CreationDate: new Date(facts.madeAt),
+    },
+  });
+  for (const [name, font] of Object.entries(fonts) as [PaperFont, Buffer][]) pdf.registerFont(name, font);
+  escapeDescription(pdf);
+  return pdf;
+}
+
+/** Ends a paper and gives its bytes. */
+export function closedPaper(pdf: Pdf): Promise<Buffer> {
+  return new Promise((resolve, reject) => {
+    const parts: Buffer[] = [];
+    pdf.on('data', (part: Buffer) => parts.push(part));
+    pdf.on('end', () => resolve(Buffer.concat(parts)));
+    pdf.on('error', reject);
+    pdf.end();
+  });
+}

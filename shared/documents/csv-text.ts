@@ -1,0 +1,16 @@
+import { guardedText } from '#shared/documents/guarded-text';
+
+/** What a cell of a list holds: a text somebody may have typed, or a figure. */
+export type CsvCell = string | number;
+
+const byteOrderMark = '\ufeff';
+
+function cellText(cell: CsvCell): string {
+  if (typeof cell === 'number') return String(cell);
+  const text = guardedText(cell);
+  return /[",\r\n]/.test(text) ? `"${text.replace(/"/g, '""')}"` : text;
+}
+
+/** Rows as comma-separated values (RFC 4180: CRLF, quotes doubled) that begin with a byte order mark; texts guarded, figures plain. */
+export const csvText = (rows: readonly (readonly CsvCell[])[]): string =>
+  byteOrderMark + rows.map((row) => `${row.map(cellText).join(',')}\r\n`).join('');
