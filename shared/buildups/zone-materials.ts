@@ -23,7 +23,8 @@ export interface ZoneMaterials {
   readonly findings: readonly Finding[];
 }
 
-interface UseOnZone {
+/** What one step uses on one zone. */
+export interface UseOnZone {
   readonly use: MaterialUse;
   readonly step: BuildUpStep;
   readonly facts: ZoneFacts;
@@ -43,8 +44,8 @@ const missing = (on: UseOnZone, code: Finding['code'], values: Finding['values']
 
 const servedArea_mm2 = ({ step, facts, card }: UseOnZone): number => facts.true_mm2 * areaShare(step, facts, card);
 
-/** Grams multiply, coverage divides; loss is the share of what is taken that never stays on the work, so the need is net ÷ (1 − loss). */
-function taken(on: UseOnZone): number {
+/** Kilograms or litres a use takes: grams multiply, coverage divides; loss is the share that never stays on the work, so the need is net ÷ (1 − loss). */
+export function amountTaken(on: UseOnZone): number {
   const { use, step, facts } = on;
   const area_m2 = (servedArea_mm2(on) / 1e6) * coatsOf(step, facts) * use.share;
   const kept = 1 - use.loss_percent / 100;
@@ -89,7 +90,7 @@ function need(on: UseOnZone, part: Taken): ZoneMaterials {
 
 function needsOfUse(on: UseOnZone): ZoneMaterials[] {
   const { use, card } = on;
-  const amount = taken(on);
+  const amount = amountTaken(on);
   if (use.of === 'material')
     return [need(on, { materialId: use.itemId, [use.way === 'grams' ? 'mass_kg' : 'volume_litres']: amount })];
   const recipe = card.recipes.find((known) => known.id === use.itemId);

@@ -3,6 +3,7 @@ import type { EstimateSettings } from '#shared/estimates/settings';
 import { jobSequence, type JobSequence, type LotSpan } from '#shared/drying/job-sequence';
 import { lotSequence, type LotSequence } from '#shared/drying/lot-sequence';
 import { endOfWork } from '#shared/drying/end-of-work';
+import { woodMovement, type WoodMovement } from '#shared/drying/wood-movement';
 import { workingTime, type WorkingTime } from '#shared/drying/working-time';
 import { countUp } from '#shared/money/settled';
 import type { RateCard } from '#shared/rate-cards/rate-card';
@@ -30,6 +31,11 @@ export interface DryFigures extends Omit<JobSequence, 'tasks' | 'lots' | 'findin
   readonly tasks: readonly DryTask[];
   /** Carving before the first lot can be sized, one carver at work. */
   readonly carving_minutes: number;
+  /** The week the work is laid into. */
+  readonly time: WorkingTime;
+  /** Moisture wood comes to rest at in the shop and where the piece will stand. */
+  readonly shopMoisture_percent: number;
+  readonly siteMoisture_percent: number;
 }
 
 /** One carver works through the members in the order of the lots; a lot is ready when all its members are carved. */
@@ -67,6 +73,10 @@ function dryLot(sequence: LotSequence, job: JobSequence, work: EstimateWork): Dr
   };
 }
 
+/** The wood itself between shop and site, no width of it in particular. */
+const woodAtRest = ({ shop, site }: EstimateSettings, card: RateCard): WoodMovement =>
+  woodMovement({ width_mm: 0, coefficient: 0, from: shop, to: site, isGessoedJoint: false }, card.drying);
+
 /** Lays a job's lots into the workshop's week in the shop's air: minutes rounded up, one worker of each grade, holds waited for. */
 export function dryFigures(
   work: EstimateWork,
@@ -78,13 +88,17 @@ export function dryFigures(
   const ready_minutes = readyTimes(work, time);
   const job = jobSequence({ lots: sequences, ready_minutes, holds_days: card.drying.holds_days, time });
   const { elapsed_minutes, elapsed_workingDays, elapsed_weeks } = job;
+  const wood = woodAtRest(settings, card);
   const dry = {
     ...{ elapsed_minutes, elapsed_workingDays, elapsed_weeks },
     carving_minutes: Math.max(0, ...Object.values(ready_minutes)),
+    time,
+    shopMoisture_percent: wood.from_percent,
+    siteMoisture_percent: wood.to_percent,
     lots: sequences.map((sequence) => dryLot(sequence, job, work)),
     tasks: job.tasks.map(({ lotId, step, coat, portion, start_minutes, end_minutes, handsOn_minutes }) => ({
       ...{ lotId, stepId: step.stepId, coat, portion, start_minutes, end_minutes, handsOn_minutes },
     })),
   };
-  return { dry, findings: [...sequences.flatMap((sequence) => sequence.findings), ...job.findings] };
+  return { dry, findings: [...sequences.flatMap((sequence) => sequence.findings), ...job.findings, ...wood.findings] };
 }

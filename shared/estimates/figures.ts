@@ -1,10 +1,12 @@
 import type { MaterialBought } from '#shared/buildups/materials-bought';
+import type { RecipeBatch } from '#shared/buildups/recipe-batches';
 import type { StripLayer } from '#shared/buildups/section-strip';
 import type { StepHours } from '#shared/buildups/step-hours';
-import type { CarvingResult, UseHours } from '#shared/carving/carving-result';
+import type { CarvingHoursRow, CarvingResult, UseHours } from '#shared/carving/carving-result';
 import type { DryFigures } from '#shared/estimates/dry-figures';
 import type { PriceCost, PriceLines } from '#shared/estimates/price/price';
 import type { Risk } from '#shared/estimates/risk/risk';
+import type { LayPlanBand } from '#shared/leaf/lay-plan';
 import type { LaysOption } from '#shared/leaf/lays-laying';
 import type { LeafPurchase } from '#shared/leaf/leaf-purchase';
 import type { LeafTotal } from '#shared/leaf/leaf-totals';
@@ -30,6 +32,8 @@ export interface MemberFigures {
   readonly bare_mm2: number;
   readonly parts: readonly SurfacePart[];
   readonly carving_hours: Triple;
+  /** The same hours by stage and grade; patterns, sharpening and recutting stand apart, in the whole. */
+  readonly carvingRows: readonly CarvingHoursRow[];
   readonly handsOn_hours: Triple;
   readonly reasons: readonly Reason[];
 }
@@ -44,6 +48,8 @@ export interface ZoneLeafFigures extends Pick<
   readonly cuts: number | null;
   readonly lap_mm: number;
   readonly side_mm: number;
+  /** What the lay plan of one member is drawn from; empty where nothing could be counted. */
+  readonly bands: readonly LayPlanBand[];
 }
 
 /** One zone worked, over all identical members. */
@@ -66,6 +72,11 @@ export interface ZoneFigures {
 export interface UseFigures extends Pick<UseHours, 'useId' | 'quantity' | 'fit' | 'factor' | 'carving' | 'reasons'> {
   readonly memberId: string;
   readonly ornament: string;
+}
+
+/** Carving over the estimate, with the names of its stages. */
+export interface CarvingFigures extends Pick<CarvingResult, 'rows' | 'total' | 'sharpening' | 'patterns' | 'reasons'> {
+  readonly stages: readonly { readonly id: string; readonly name: string }[];
 }
 
 /** Leaf of one product over the estimate. */
@@ -111,10 +122,12 @@ export interface WorkFigures {
   readonly members: readonly MemberFigures[];
   readonly zones: readonly ZoneFigures[];
   readonly uses: readonly UseFigures[];
-  readonly carving: Pick<CarvingResult, 'rows' | 'total' | 'sharpening' | 'patterns' | 'reasons'>;
+  readonly carving: CarvingFigures;
   readonly grades: readonly GradeFigures[];
   readonly leaf: readonly LeafFigures[];
   readonly materials: readonly Omit<MaterialBought, 'cost' | 'findings' | 'packs'>[];
+  /** Sizes mixed from their recipes: for each piece one batch of each. */
+  readonly batches: readonly RecipeBatch[];
   readonly dry: DryFigures;
   readonly findings: readonly Finding[];
 }

@@ -9,6 +9,13 @@ const triple = z.strictObject({ low: figure, likely: figure, high: figure });
 const reasons = z.array(reasonSchema);
 const findings = z.array(findingSchema);
 
+const carvingRow = z.strictObject({
+  kind: z.enum(['stage', 'undercutting', 'pattern', 'once', 'shaping', 'free', 'sharpening', 'recutting']),
+  stageId: text,
+  gradeId: text,
+  hours: triple,
+});
+
 const member = z.strictObject({
   memberId: text,
   timber: text,
@@ -21,8 +28,17 @@ const member = z.strictObject({
   bare_mm2: figure,
   parts: z.array(z.strictObject({ key: text, element: text, girth_mm: figure, area_mm2: figure })),
   carving_hours: triple,
+  carvingRows: z.array(carvingRow),
   handsOn_hours: triple,
   reasons,
+});
+
+const band = z.strictObject({
+  length_mm: figure,
+  height_mm: figure,
+  pieceLength_mm: figure,
+  pieceHeight_mm: figure,
+  lap_mm: figure,
 });
 
 const zoneLeaf = z.strictObject({
@@ -36,6 +52,7 @@ const zoneLeaf = z.strictObject({
   cuts: figure.nullable(),
   lap_mm: figure,
   side_mm: figure,
+  bands: z.array(band),
   reasons,
 });
 
@@ -92,18 +109,12 @@ const use = z.strictObject({
   reasons,
 });
 
-const carvingRow = z.strictObject({
-  kind: z.enum(['stage', 'undercutting', 'pattern', 'once', 'shaping', 'free', 'sharpening', 'recutting']),
-  stageId: text,
-  gradeId: text,
-  hours: triple,
-});
-
 const carving = z.strictObject({
   rows: z.array(carvingRow),
   total: triple,
   sharpening: triple,
   patterns: z.array(z.strictObject({ ornamentId: text, patterns: figure, hours: triple })),
+  stages: z.array(z.strictObject({ id: text, name: text })),
   reasons,
 });
 
@@ -145,11 +156,30 @@ const dryStep = z.strictObject({
   reasons,
 });
 
+const batch = z.strictObject({
+  pieceId: text,
+  recipeId: text,
+  name: text,
+  volume_litres: figure,
+  parts: z.array(
+    z.strictObject({
+      partId: text,
+      name: text,
+      volume_litres: figure,
+      mass_grams: figure.nullable(),
+      reason: reasonSchema,
+    }),
+  ),
+});
+
 const dry = z.strictObject({
   elapsed_minutes: figure,
   elapsed_workingDays: figure,
   elapsed_weeks: figure,
   carving_minutes: figure,
+  time: z.strictObject({ day_minutes: figure, days: figure, productiveShare_percent: figure }),
+  shopMoisture_percent: figure,
+  siteMoisture_percent: figure,
   lots: z.array(
     z.strictObject({
       lotId: text,
@@ -200,6 +230,7 @@ export const workFiguresSchema = z.strictObject({
   materials: z.array(
     z.strictObject({ materialId: text, name: text, unit: z.enum(['kg', 'L']), need: text, bought: text, reasons }),
   ),
+  batches: z.array(batch),
   dry,
   findings,
 });

@@ -1,9 +1,12 @@
 import { groundThickness } from '#shared/buildups/ground-thickness';
+import { recipeBatches } from '#shared/buildups/recipe-batches';
 import { sectionStrip } from '#shared/buildups/section-strip';
+import { rowsTogether } from '#shared/carving/hours-rows';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import { dryFigures } from '#shared/estimates/dry-figures';
 import type { EstimateWork } from '#shared/estimates/estimate-work';
 import type {
+  CarvingFigures,
   GradeFigures,
   LeafFigures,
   MemberFigures,
@@ -17,6 +20,7 @@ import type { MeasuredMember } from '#shared/estimates/measured-member';
 import type { EstimateSettings } from '#shared/estimates/settings';
 import type { WorkedZone } from '#shared/estimates/worked-zone';
 import { bookletsFor } from '#shared/leaf/booklets-for';
+import { layPlanBands } from '#shared/leaf/lay-plan-bands';
 import type { LeafProduct } from '#shared/leaf/leaf-product';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { tripleSum } from '#shared/units/triple-sum';
@@ -42,6 +46,7 @@ function memberFigures(measured: MeasuredMember, work: EstimateWork, card: RateC
     bare_mm2: areas.bare_mm2,
     parts: surface.parts,
     carving_hours: tripleSum(uses.map((use) => use.carving)),
+    carvingRows: rowsTogether(uses.flatMap((use) => use.rows)),
     handsOn_hours: tripleSum(zones.map((zone) => zone.handsOn.hours)),
     reasons: surface.reasons,
   };
@@ -51,13 +56,14 @@ function zoneLeafFigures({ leaf }: WorkedZone, card: RateCard): ZoneLeafFigures 
   const product = card.leaf.products.find((known) => known.id === leaf?.productId);
   if (!leaf || !product) return null;
   const { productId, way, netLeaves, grossLeaves, handled, reasons, laying } = leaf;
+  const step = { side_mm: product.side_mm, lap_mm: card.leaf.laps_mm[way] };
   return {
     ...{ productId, way, netLeaves, grossLeaves, handled, reasons },
     name: product.name,
     strips: laying?.way === 'lays' ? laying.chosen.strips : null,
     cuts: laying?.way === 'patches' ? laying.cuts : null,
-    lap_mm: card.leaf.laps_mm[way],
-    side_mm: product.side_mm,
+    ...step,
+    bands: laying ? layPlanBands(laying, step) : [],
   };
 }
 
@@ -89,6 +95,12 @@ function useFigures(work: EstimateWork, card: RateCard): UseFigures[] {
     memberId: work.members.find(({ member }) => member.ornaments.some((own) => own.id === useId))?.member.id ?? '',
     ornament: nameOf(items, ornamentId),
   }));
+}
+
+function carvingFigures({ carving }: EstimateWork, card: RateCard): CarvingFigures {
+  const { rows, total, sharpening, patterns, reasons } = carving;
+  const stages = card.carving.stages.map(({ id, name }) => ({ id, name }));
+  return { rows, total, sharpening, patterns, stages, reasons };
 }
 
 const leafFigures = (work: EstimateWork, card: RateCard): LeafFigures[] =>
@@ -156,19 +168,19 @@ const tallyOf = (work: EstimateWork, card: RateCard, members: readonly MemberFig
 export function workFigures(work: EstimateWork, settings: EstimateSettings, card: RateCard): WorkFigures {
   const { dry, findings } = dryFigures(work, settings, card);
   const members = work.members.map((measured) => memberFigures(measured, work, card));
-  const { rows, total, sharpening, patterns, reasons } = work.carving;
   return {
     calculatorVersion,
     tally: { ...tallyOf(work, card, members), workingDays: dry.elapsed_workingDays, weeks: dry.elapsed_weeks },
     members,
     zones: work.zones.map((zone) => zoneFigures(zone, card)),
     uses: useFigures(work, card),
-    carving: { rows, total, sharpening, patterns, reasons },
+    carving: carvingFigures(work, card),
     grades: gradeFigures(work, card),
     leaf: leafFigures(work, card),
     materials: work.materials.map(({ materialId, name, unit, need, bought, reasons: because }) => ({
       ...{ materialId, name, unit, need, bought, reasons: because },
     })),
+    batches: recipeBatches(work.zones, card.buildUps),
     dry,
     findings: [...work.findings, ...findings],
   };

@@ -28,6 +28,7 @@ const workOf = (figures: Figures): WorkFigures => ({
   grades: figures.grades,
   leaf: figures.leaf,
   materials: figures.materials,
+  batches: figures.batches,
   dry: figures.dry,
   findings: figures.findings,
 });
