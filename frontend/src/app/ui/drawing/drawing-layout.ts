@@ -9,6 +9,7 @@ type Side = ScaleDimension['side'];
 /** Where a dimension stands on the screen, in px: its two witness lines, its own line, and the middle of its figure. */
 export interface PlacedDimension {
   readonly label_mm: number;
+  readonly words?: string;
   readonly isUpright: boolean;
   readonly lines: string;
   readonly x: number;
@@ -76,13 +77,13 @@ interface Ends {
   readonly at: number;
 }
 
-function placed({ label_mm, side }: ScaleDimension, { from, to, at }: Ends): PlacedDimension {
+function placed({ label_mm, words, side }: ScaleDimension, { from, to, at }: Ends): PlacedDimension {
   if (side === 'above' || side === 'below') {
     const beyond = side === 'above' ? at - overshoot_px : at + overshoot_px;
     const lines = `M${from.x} ${from.y}V${beyond}M${to.x} ${to.y}V${beyond}M${from.x} ${at}H${to.x}`;
-    return { label_mm, isUpright: false, lines, x: (from.x + to.x) / 2, y: at };
+    return { label_mm, words, isUpright: false, lines, x: (from.x + to.x) / 2, y: at };
   }
   const beyond = side === 'left' ? at - overshoot_px : at + overshoot_px;
   const lines = `M${from.x} ${from.y}H${beyond}M${to.x} ${to.y}H${beyond}M${at} ${from.y}V${to.y}`;
-  return { label_mm, isUpright: true, lines, x: at, y: (from.y + to.y) / 2 };
+  return { label_mm, words, isUpright: true, lines, x: at, y: (from.y + to.y) / 2 };
 }

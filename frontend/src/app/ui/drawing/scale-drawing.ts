@@ -32,7 +32,10 @@ export class ScaleDrawing {
     drawingLayout(this.view(), { width: this.width_px(), height: this.most_px() }),
   );
   protected readonly dimensions = computed(() =>
-    this.layout().dimensions.map((dimension) => ({ ...dimension, text: this.formats.length(dimension.label_mm) })),
+    this.layout().dimensions.map((dimension) => ({
+      ...dimension,
+      text: dimension.words ?? this.formats.length(dimension.label_mm),
+    })),
   );
   /** The dimensions in words too: a drawing one cannot see still says how large the thing is. */
   protected readonly inWords = computed(() => [this.label(), ...this.dimensions().map(({ text }) => text)].join(', '));

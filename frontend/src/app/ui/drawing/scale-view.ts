@@ -10,9 +10,9 @@ export interface ScaleView {
   };
 }
 
-/** SVG path data in mm; `gold` is drawn in gold, `leaf` and `lap` are filled fields of a lay plan. */
+/** SVG path data in mm; `gold` is drawn in gold, `leaf`, `pale` and `lap` are filled fields of a lay plan. */
 export interface ScalePath {
-  readonly kind: 'outline' | 'hidden' | 'axis' | 'gold' | 'leaf' | 'lap';
+  readonly kind: 'outline' | 'hidden' | 'axis' | 'gold' | 'leaf' | 'pale' | 'lap';
   readonly data: string;
 }
 
@@ -25,5 +25,7 @@ export interface ScaleDimension {
   readonly from: ScalePoint;
   readonly to: ScalePoint;
   readonly label_mm: number;
+  /** What it says, where that is more than the length: “844 mm shown of 2,860”. */
+  readonly words?: string;
   readonly side: 'above' | 'below' | 'left' | 'right';
 }
