@@ -13,21 +13,30 @@ export interface Parts {
   readonly file?: { readonly name: string; readonly bytes: Buffer };
 }
 
+type Method = Endpoint['method'];
+
 /** Somebody with a browser: keeps the cookie, sends the token. */
 export class Visitor {
-  readonly agent: ReturnType<typeof request.agent>;
   token = '';
+  cookie = '';
 
   constructor(
-    express: Express,
+    private readonly express: Express,
     private readonly headers: Readonly<Record<string, string>> = {},
-  ) {
-    this.agent = request.agent(express);
+  ) {}
+
+  /** A request with the cookie and without the token. A cookie is kept whatever its address, as if https were before the server. */
+  request(method: Method, path: string): Test {
+    const test = request(this.express)[method](path).set(this.headers);
+    if (this.cookie) test.set('cookie', this.cookie);
+    return test.on('response', ({ headers }: { headers: Record<string, string[] | undefined> }) => {
+      for (const line of headers['set-cookie'] ?? []) this.cookie = line.split(';')[0] ?? '';
+    }) as Test;
   }
 
   /** Asks for the session, as the page does first of all. */
   async arrive(): Promise<this> {
-    const { body } = (await this.agent.get(readSession.path).set(this.headers)) as { body: { token: string } };
+    const { body } = (await this.request('get', readSession.path)) as { body: { token: string } };
     this.token = body.token;
     return this;
   }
@@ -45,9 +54,7 @@ export class Visitor {
     const path = endpoint.path.replace(/:(\w+)/g, (_, name: string) =>
       encodeURIComponent(parts.params?.[name] ?? 'missing'),
     );
-    const test = this.agent[endpoint.method](path)
-      .set(this.headers)
-      .query(parts.query ?? {});
+    const test = this.request(endpoint.method, path).query(parts.query ?? {});
     if (endpoint.method !== 'get') test.set('x-csrf-token', this.token);
     if (parts.version !== undefined) test.set('if-match', `"${parts.version}"`);
     if (parts.key !== undefined) test.set('idempotency-key', parts.key);

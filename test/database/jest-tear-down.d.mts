@@ -1,0 +1,2 @@
+/** Stops what jest-set-up started. */
+export default function tearDown(): Promise<void>;
