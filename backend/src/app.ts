@@ -2,6 +2,7 @@ import { openAccounts, type Accounts } from './accounts';
 import { openAudit, type Audit } from './audit';
 import { openEstimates, type Estimates, type PaperMaker } from './estimates';
 import { openJobs, type Jobs } from './jobs';
+import { isPage } from './page-places';
 import { openWebServer, type WebServer } from './platform/http/web-server';
 import type { MailCatcher } from './platform/mail/mail-catcher';
 import type { Platform } from './platform/platform';
@@ -38,7 +39,7 @@ export function openApp(platform: Platform, catcher?: MailCatcher): App {
   });
   const estimates: Estimates = openEstimates(platform, { accounts, audit, rateCards, jobs, papers });
   const routes = [...audit.routes, ...accounts.routes, ...rateCards.routes, ...jobs.routes, ...estimates.routes];
-  const web = openWebServer(platform, { routes, identities: accounts.identities, isPage: () => true, catcher });
+  const web = openWebServer(platform, { routes, identities: accounts.identities, isPage, catcher });
   const sweep = async () => void (await Promise.all([web.sweep(), accounts.sweep(), platform.files.sweep()]));
   return { audit, accounts, rateCards, jobs, estimates, web, sweep };
 }

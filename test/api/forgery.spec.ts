@@ -11,12 +11,12 @@ beforeAll(async () => {
 afterAll(() => api.stop());
 
 const nameOf = async (): Promise<string> => {
-  const { body } = await api.as('bench').agent.get('/api/session');
+  const { body } = await api.as('bench').request('get', '/api/session');
   return (body as { signedIn: { name: string } }).signedIn.name;
 };
 
 const send = (headers: Record<string, string>, body: string | object = { name: 'Forged Name' }) => {
-  const test = api.as('bench').agent.put(changeOwnName.path).set(headers);
+  const test = api.as('bench').request('put', changeOwnName.path).set(headers);
   return test.send(body);
 };
 const own = () => ({ 'x-csrf-token': api.as('bench').token });
@@ -53,8 +53,16 @@ test('our own page may change something', async () => {
   expect(response.status).toBe(200);
 });
 
+test('after a session has ended, a change is answered with a request to sign in, so that the page can ask for it', async () => {
+  const { visitor } = await api.newcomer(api.ours, 'bench');
+  api.clock.move({ minutes: 31 });
+  const response = await visitor.call(changeOwnName, { body: { name: 'Herons late' } });
+  api.clock.move({ minutes: -31 });
+  expect(response.status).toBe(401);
+});
+
 test('a token is of no use under another method override', async () => {
-  const response = await api.as('bench').agent.get(endOtherSessions.path).set('x-http-method-override', 'DELETE');
+  const response = await api.as('bench').request('get', endOtherSessions.path).set('x-http-method-override', 'DELETE');
   expect(response.status).toBe(200);
 });
 
@@ -63,7 +71,7 @@ test('no reading changes anything', async () => {
   const sums = () => api.platform.database.select('CHECKSUM TABLE ' + watched.join(', '));
   const before = await sums();
   for (const { path } of endpoints.filter(({ method, path: at }) => method === 'get' && !at.includes(':'))) {
-    await api.as('owner').agent.get(path);
+    await api.as('owner').request('get', path);
   }
   expect(await sums()).toEqual(before);
 });

@@ -8,15 +8,19 @@ import {
   signOut,
 } from '#shared/accounts/session-endpoints';
 import { foundAnother, readWorkshop } from '#shared/accounts/workshop-endpoints';
-import { password, startApi, type Api } from './start-api';
+import { password, startApi, type Api, type TestPerson } from './start-api';
 import { foundingSettings } from './test-workshop';
 import { Visitor } from './visitor';
 
 /** How sessions begin and end (ASVS 7.2.3, 7.2.4, 7.3.1, 7.3.2, 7.4, 7.5.2). */
 let api: Api;
+let owner: TestPerson;
 beforeAll(async () => {
   api = await startApi();
 }, 60_000);
+beforeEach(async () => {
+  owner = await api.newcomer(api.ours, 'owner');
+});
 afterAll(() => api.stop());
 
 const cookieOf = (headers: Record<string, unknown>): string =>
@@ -51,7 +55,7 @@ describe('time', () => {
     const { visitor } = await api.newcomer(api.ours, 'bench');
     for (let count = 0; count < 3; count++) {
       api.clock.move({ minutes: 9 });
-      expect((await visitor.agent.get(listPeople.path).set('x-unattended', '1')).status).toBe(200);
+      expect((await visitor.request('get', listPeople.path).set('x-unattended', '1')).status).toBe(200);
     }
     api.clock.move({ minutes: 4 });
     expect((await visitor.call(listPeople)).status).toBe(401);
@@ -75,13 +79,13 @@ describe('its id', () => {
   test('is new at sign-in, and the one before is dead', async () => {
     const { email } = await api.newcomer(api.ours, 'bench');
     const visitor = new Visitor(api.app.web.express);
-    const before = cookieOf((await visitor.agent.get(readSession.path)).headers);
+    const before = cookieOf((await visitor.request('get', readSession.path)).headers);
     await visitor.arrive();
     const response = await visitor.signIn(email, password);
     const after = cookieOf(response.headers);
     expect(after).not.toBe(before);
-    const fixed = await new Visitor(api.app.web.express).agent
-      .get(listPeople.path)
+    const fixed = await new Visitor(api.app.web.express)
+      .request('get', listPeople.path)
       .set('cookie', `bolewright=${before}`);
     expect(fixed.status).toBe(401);
   });
@@ -89,7 +93,7 @@ describe('its id', () => {
   test('is 256 bits, never twice, and kept only as a hash', async () => {
     const ids = new Set<string>();
     for (let count = 0; count < 200; count++) {
-      const { headers } = await new Visitor(api.app.web.express).agent.get(readSession.path);
+      const { headers } = await new Visitor(api.app.web.express).request('get', readSession.path);
       ids.add(decodeURIComponent(cookieOf(headers)).replace(/^s:/, '').split('.')[0] ?? '');
     }
     expect(ids.size).toBe(200);
@@ -103,8 +107,8 @@ describe('its id', () => {
     const { visitor } = await api.newcomer(api.ours, 'bench');
     const cookie = cookieOf((await visitor.signIn('x@y.example', 'wrong password here')).headers);
     expect(cookie).toBe('');
-    const response = await new Visitor(api.app.web.express).agent
-      .get(listPeople.path)
+    const response = await new Visitor(api.app.web.express)
+      .request('get', listPeople.path)
       .set('cookie', 'bolewright=s%3Aabc.def');
     expect(response.status).toBe(401);
   });
@@ -120,10 +124,10 @@ describe('its end', () => {
   test('comes with the end of access, which does not touch other workshops', async () => {
     const { visitor, actor } = await api.newcomer(api.ours, 'bench');
     const end = { params: { id: actor.membershipId }, version: 1, body: { isDisabled: true } };
-    expect((await api.as('owner').call(changeAccess, end)).status).toBe(200);
+    expect((await owner.visitor.call(changeAccess, end)).status).toBe(200);
     expect((await visitor.call(listPeople)).status).toBe(401);
     const restore = { params: { id: actor.membershipId }, version: 2, body: { isDisabled: false } };
-    expect((await api.as('owner').call(changeAccess, restore)).status).toBe(200);
+    expect((await owner.visitor.call(changeAccess, restore)).status).toBe(200);
   });
 
   test('comes to the other sessions with a new password; this one gets a new id', async () => {
@@ -155,7 +159,7 @@ describe('its end', () => {
 test('other roles hold from the next request on', async () => {
   const { visitor, actor } = await api.newcomer(api.ours, 'bench');
   const change = { params: { id: actor.membershipId }, version: 1, body: { roles: ['owner'] } };
-  expect((await api.as('owner').call(changeRoles, change)).status).toBe(200);
+  expect((await owner.visitor.call(changeRoles, change)).status).toBe(200);
   const { body } = await visitor.call(listPeople);
   expect((body as { items: object[] }).items[0]).toHaveProperty('email');
 });

@@ -1,4 +1,4 @@
-import { mkdtemp, rm } from 'node:fs/promises';
+import { mkdir, mkdtemp, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import type { Role } from '#shared/actor/role';
@@ -46,6 +46,8 @@ const settings = {
 async function openParts(environment: Environment) {
   const folder = await mkdtemp(join(tmpdir(), 'bolewright-api-'));
   const places = { DATABASE_URL: await freshDatabase(), DATA_DIR: folder, WEB_DIR: join(folder, 'web') };
+  await mkdir(places.WEB_DIR);
+  await writeFile(join(places.WEB_DIR, 'index.html'), '<!doctype html><app-root ngCspNonce="CSP_NONCE"></app-root>');
   const config = readConfig({ ...settings, ...places, ...environment });
   const logLines: string[] = [];
   const clock = new MovingClock();

@@ -8,9 +8,11 @@ const server = (): string => {
   return url;
 };
 
+let made = 0;
+
 /** An empty database of this Jest worker's own, brought up to date; answers its address. */
 export async function freshDatabase(): Promise<string> {
-  const name = `test_${process.env['JEST_WORKER_ID'] ?? '0'}`;
+  const name = `test_${process.env['JEST_WORKER_ID'] ?? '0'}_${++made}`;
   const root = new Database(`${server()}/mysql`, 1);
   await root.sequelize.getQueryInterface().dropDatabase(name);
   await root.sequelize.getQueryInterface().createDatabase(name);

@@ -28,11 +28,17 @@ export const peopleRoutes = ({ people, invitations, identities }: Parts): Route[
     const rows = await people.list(actor.workshopId);
     return { items: rows.map(audienceOf(actor.roles) === 'cost' ? presentPerson : presentColleague) };
   }),
-  mount(changeRoles, async ({ actor, params, version, body }) =>
-    presentPerson(await people.changeRoles(actor, { id: params.id, version }, body.roles)),
+  mount(
+    changeRoles,
+    async ({ actor, params, version, body }) =>
+      presentPerson(await people.changeRoles(actor, { id: params.id, version }, body.roles)),
+    presentPerson,
   ),
-  mount(changeAccess, async ({ actor, params, version, body }) =>
-    presentPerson(await people.changeAccess(actor, { id: params.id, version }, body.isDisabled)),
+  mount(
+    changeAccess,
+    async ({ actor, params, version, body }) =>
+      presentPerson(await people.changeAccess(actor, { id: params.id, version }, body.isDisabled)),
+    presentPerson,
   ),
   mount(changeOwnName, async ({ person, actor, body, session }) => {
     await people.changeOwnName(person.accountId, body.name);

@@ -58,8 +58,10 @@ export class PeopleService {
   private async change(actor: Actor, at: At, { change, code }: { change: Change; code: WordCode }): Promise<PersonRow> {
     const { memberships, accounts, audit } = this.parts;
     const before = await this.keepingAnOwner(actor.workshopId, at.id, change);
+    const { name, email } = await accounts.get(before.accountId);
+    if (before.version !== at.version)
+      throw new Rejection('stale', 'problem-stale', { detail: { ...before, name, email } });
     const after = await memberships.change(actor.workshopId, at, change);
-    const { name, email } = await accounts.get(after.accountId);
     await audit.record(actor, {
       subject: { kind: 'person', id: at.id },
       code,

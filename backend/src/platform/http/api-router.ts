@@ -3,6 +3,7 @@ import multer from 'multer';
 import type { Endpoint } from '#shared/actor/endpoint';
 import { Rejection } from '#shared/problems/rejection';
 import { signedInOf } from './sessions';
+import { refuseWithoutToken } from './forgery';
 import { guard } from './guard';
 import type { Route } from './mount';
 import { serve, type Serving } from './serve';
@@ -22,6 +23,7 @@ const guarded =
   (endpoint: Endpoint): RequestHandler =>
   (request, _response, next) => {
     guard(endpoint, signedInOf(request));
+    refuseWithoutToken(request);
     next();
   };
 

@@ -36,13 +36,19 @@ function isOurKind(request: Request): boolean {
   return !hasBody || Boolean(request.is(['application/json', 'multipart/form-data']));
 }
 
-/** Refuses what changes something unless it carries the session's token, comes from our own pages, and is JSON or an upload. */
+const isReading = (request: Request): boolean => reading.has(request.method);
+const forged = () => new Rejection('not-allowed', 'problem-forged');
+
+/** Refuses what changes something unless it comes from our own pages and is JSON or an upload. */
 export const forgeryCheck =
   (config: Config): RequestHandler =>
   (request, response, next) => {
     response.vary('Sec-Fetch-Site').vary('Origin');
-    if (reading.has(request.method)) return next();
-    if (!comesFromUs(config, request) || !isOurKind(request) || !carriesToken(request))
-      throw new Rejection('not-allowed', 'problem-forged');
+    if (!isReading(request) && (!comesFromUs(config, request) || !isOurKind(request))) throw forged();
     next();
   };
+
+/** Refuses what changes something unless it carries its session's token; asked after who somebody is, so that an ended session is told apart. */
+export function refuseWithoutToken(request: Request): void {
+  if (!isReading(request) && !carriesToken(request)) throw forged();
+}
