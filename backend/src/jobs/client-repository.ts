@@ -1,16 +1,11 @@
 import { Op, type WhereOptions } from 'sequelize';
-import * as z from 'zod';
 import type { Database } from '../platform/database/database';
 import { ListedRows, type ListOrder } from '../platform/database/listed-rows';
 import { SearchWords } from '../platform/database/search-words';
 import type { Page, PageAsked } from '../platform/database/workshop-rows';
 import { clientTable, type ClientRow } from './client-model';
 
-const byName: ListOrder<ClientRow> = {
-  columns: ['name', 'id'],
-  direction: 'ASC',
-  cursor: z.tuple([z.string(), z.uuid()]),
-};
+const byName: ListOrder<ClientRow> = { columns: { name: 'text', id: 'id' }, direction: 'ASC' };
 
 export class ClientRepository extends ListedRows<ClientRow> {
   constructor(database: Database) {
@@ -29,7 +24,7 @@ export class ClientRepository extends ListedRows<ClientRow> {
   }
 
   async countJobs(workshopId: string, id: string, by: 1 | -1): Promise<void> {
-    await this.table.increment('jobs', { by, where: { workshopId, id } as WhereOptions<ClientRow> });
+    await this.table.increment('jobs', { by, where: { workshopId, id } });
   }
 
   /** Writes down the words by which the client is found. */

@@ -3,7 +3,8 @@ import type { ClientContent } from '#shared/jobs/client-schema';
 import { Rejection } from '#shared/problems/rejection';
 import type { AuditService } from '../audit';
 import type { Clock } from '../platform/clock/clock';
-import { keepingOf, refuseStale, type Seen } from '../platform/database/keeping';
+import { failureOf } from '../platform/database/failure';
+import { atOf, keepingOf, refuseStale, type Seen } from '../platform/database/keeping';
 import type { Page, PageAsked } from '../platform/database/workshop-rows';
 import type { ClientRow } from './client-model';
 import { presentClientContent } from './client-presenter';
@@ -33,7 +34,7 @@ export class ClientService {
   async keep(actor: Actor, seen: Seen, content: ClientContent): Promise<ClientRow> {
     const row = await this.parts.clients.find(actor.workshopId, seen.id);
     const keeping = keepingOf(row, seen.version, content);
-    if (keeping.is === 'entry') return this.enter(actor, seen.id, content);
+    if (keeping.is === 'entry') return this.enterOnce(actor, seen, content);
     return keeping.is === 'change' ? this.change(actor, keeping.from, content) : keeping.row;
   }
 
@@ -55,6 +56,14 @@ export class ClientService {
     });
   }
 
+  /** Somebody may enter the same client at this very moment: then it is there by now. */
+  private enterOnce(actor: Actor, seen: Seen, content: ClientContent): Promise<ClientRow> {
+    return this.enter(actor, seen.id, content).catch((error: unknown) => {
+      if (failureOf(error) !== 'taken') throw error;
+      return this.keep(actor, seen, content);
+    });
+  }
+
   private async enter(actor: Actor, id: string, content: ClientContent): Promise<ClientRow> {
     const { clients, audit, clock } = this.parts;
     const start = { id, jobs: 0, version: 1, createdAt: clock.now() };
@@ -73,7 +82,7 @@ export class ClientService {
   private async change(actor: Actor, before: ClientRow, content: ClientContent): Promise<ClientRow> {
     const { clients, jobs, audit } = this.parts;
     const { workshopId, id, name } = before;
-    const after = await clients.change(workshopId, before, content);
+    const after = await clients.change(workshopId, atOf(before), content);
     await clients.writeWords(workshopId, after);
     if (after.name !== name) await jobs.writeWordsOfClient(workshopId, id, after.name);
     const subject = { kind: 'client', id };

@@ -5,7 +5,7 @@ import { Rejection } from '#shared/problems/rejection';
 import type { WorkshopService } from '../accounts';
 import type { Clock } from '../platform/clock/clock';
 import type { Counters } from '../platform/database/counters';
-import { keepingOf, refuseStale, type Seen } from '../platform/database/keeping';
+import { atOf, keepingOf, refuseStale, type Seen } from '../platform/database/keeping';
 import type { Page } from '../platform/database/workshop-rows';
 import type { ClientRow } from './client-model';
 import type { ClientRepository } from './client-repository';
@@ -90,7 +90,7 @@ export class JobService {
   private async change(actor: Actor, before: NamedJobRow, content: JobContent): Promise<JobRow> {
     const { jobs, clients, history, clock } = this.parts;
     const { workshopId } = actor;
-    const after = await jobs.change(workshopId, before, { ...content, changedAt: clock.now() });
+    const after = await jobs.change(workshopId, atOf(before), { ...content, changedAt: clock.now() });
     if (before.clientId !== content.clientId) {
       await clients.countJobs(workshopId, before.clientId, -1);
       await clients.countJobs(workshopId, content.clientId, 1);

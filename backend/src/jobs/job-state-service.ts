@@ -2,7 +2,7 @@ import type { Actor } from '#shared/actor/actor';
 import type { JobState, ReachedState } from '#shared/jobs/job-schema';
 import type { Doer } from '../audit';
 import type { Clock } from '../platform/clock/clock';
-import { refuseStale, type Seen } from '../platform/database/keeping';
+import { atOf, refuseStale, type Seen } from '../platform/database/keeping';
 import type { JobHistory } from './job-history';
 import type { JobRow, NamedJobRow } from './job-model';
 import type { JobRepository } from './job-repository';
@@ -26,7 +26,7 @@ export class JobStateService {
     const state = isFinished ? 'finished' : before.reached;
     if (before.state === state) return before;
     refuseStale(before, seen.version);
-    const after = await jobs.change(actor.workshopId, before, { state, changedAt: clock.now() });
+    const after = await jobs.change(actor.workshopId, atOf(before), { state, changedAt: clock.now() });
     await this.tell(actor, before, after);
     return { ...after, clientName: before.clientName };
   }

@@ -7,6 +7,9 @@ export interface Seen {
   readonly version: number;
 }
 
+/** The row as it stands, for a change of it. */
+export const atOf = ({ id, version }: VersionedRow): Seen => ({ id, version });
+
 /** What a PUT amounts to: a first entry, a change, or nothing, because the row says this already. */
 export type Keeping<R> =
   { readonly is: 'entry' } | { readonly is: 'change'; readonly from: R } | { readonly is: 'repeat'; readonly row: R };

@@ -1,15 +1,13 @@
 import { Op, type WhereOptions } from 'sequelize';
-import type * as z from 'zod';
-import { cursorAt, readCursor } from './cursor';
+import { cursorAt, readCursor, type CursorKind } from './cursor';
 import type { Table } from './database';
 import type { SearchWords } from './search-words';
 import { WorkshopRows, type Page, type PageAsked, type WorkshopRow } from './workshop-rows';
 
-/** An order a list stands in, along an index: the columns together are different in every row, `cursor` reads their values. */
+/** An order a list stands in, along an index: its columns in turn, which together are different in every row. */
 export interface ListOrder<R> {
-  readonly columns: readonly (keyof R & string)[];
+  readonly columns: Readonly<Partial<Record<keyof R & string, CursorKind>>>;
   readonly direction: 'ASC' | 'DESC';
-  readonly cursor: z.ZodType<readonly unknown[]>;
 }
 
 export interface ListAsked<R> extends PageAsked {
@@ -27,10 +25,12 @@ interface Matching<R> {
 const countLimit = 1_000;
 
 /** Further on than these values: beyond the first, or level with it and further on in the rest. */
-function beyond<R>({ columns, direction }: ListOrder<R>, values: readonly unknown[]): WhereOptions<R> {
+function beyond<R>({ columns, direction }: ListOrder<R>, cursor: string): WhereOptions<R> {
+  const values = readCursor(cursor, Object.values<CursorKind>(columns as Record<string, CursorKind>));
   const further = direction === 'ASC' ? Op.gt : Op.lt;
-  const steps = columns.map((column, at) => ({
-    ...Object.fromEntries(columns.slice(0, at).map((level, index) => [level, values[index]])),
+  const names = Object.keys(columns);
+  const steps = names.map((column, at) => ({
+    ...Object.fromEntries(names.slice(0, at).map((level, index) => [level, values[index]])),
     [column]: { [further]: values[at] },
   }));
   return { [Op.or]: steps } as WhereOptions<R>;
@@ -66,10 +66,10 @@ export class ListedRows<R extends WorkshopRow> extends WorkshopRows<R> {
   }
 
   private async rowsFrom({ order, cursor, limit }: ListAsked<R>, { where, replacements }: Matching<R>): Promise<R[]> {
-    const from = cursor === undefined ? [] : [beyond(order, readCursor(cursor, order.cursor))];
+    const from = cursor === undefined ? [] : [beyond(order, cursor)];
     const rows = await this.table.findAll({
       where: { [Op.and]: [where, ...from] } as WhereOptions<R>,
-      order: order.columns.map((column): [string, string] => [column, order.direction]),
+      order: Object.keys(order.columns).map((column): [string, string] => [column, order.direction]),
       limit: limit + 1,
       replacements,
       raw: true,
@@ -90,6 +90,6 @@ export class ListedRows<R extends WorkshopRow> extends WorkshopRows<R> {
   }
 
   private cursorAfter(last: R | undefined, { columns }: ListOrder<R>): string | null {
-    return last ? cursorAt(columns.map((column) => last[column])) : null;
+    return last ? cursorAt(Object.keys(columns).map((column) => last[column as keyof R])) : null;
   }
 }

@@ -101,13 +101,13 @@ export class SearchWords {
     workshopId: string,
     { few, common }: Narrowing,
   ): { where: WhereOptions[]; values: Record<string, unknown> } {
-    const patterns = Array.from({ length: askedAtMost }, (_, index) => {
+    const patterns = Array.from({ length: askedAtMost }, (_, index): [string, string] => {
       const word = common[index];
       return [`word${index + 1}`, word === undefined ? '' : pattern(word)];
     });
     return {
       where: [...(few ? [{ id: [...few] }] : []), ...(common.length > 0 ? [hasCommonWords] : [])],
-      values: { workshopId, kind: this.kind, allBits: 2 ** common.length - 1, ...Object.fromEntries(patterns) },
+      values: { workshopId, kind: this.kind, allBits: 2 ** common.length - 1, ...Object.fromEntries<string>(patterns) },
     };
   }
 
