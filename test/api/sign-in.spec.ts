@@ -3,7 +3,7 @@ import { askToFound } from '#shared/accounts/workshop-endpoints';
 import { signIn } from '#shared/accounts/session-endpoints';
 import { password, startApi, type Api } from './start-api';
 import { foundingSettings } from './test-workshop';
-import { Visitor } from './visitor';
+import type { Visitor } from './visitor';
 
 /** Guessing is held off, and nobody learns who is known here (ASVS 6.3.1, 6.3.8; OWASP on authentication). */
 let api: Api;

@@ -29,9 +29,10 @@ export class Visitor {
   request(method: Method, path: string): Test {
     const test = request(this.express)[method](path).set(this.headers);
     if (this.cookie) test.set('cookie', this.cookie);
-    return test.on('response', ({ headers }: { headers: Record<string, string[] | undefined> }) => {
+    test.on('response', ({ headers }: { headers: Record<string, string[] | undefined> }) => {
       for (const line of headers['set-cookie'] ?? []) this.cookie = line.split(';')[0] ?? '';
-    }) as Test;
+    });
+    return test;
   }
 
   /** Asks for the session, as the page does first of all. */

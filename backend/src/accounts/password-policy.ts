@@ -4,7 +4,6 @@ import { Rejection } from '#shared/problems/rejection';
 import type { WordCode, WordValues } from '#shared/words/word-code';
 import { commonPhrases } from './common-phrases';
 
-const common = new Set(dictionary['passwords']);
 const rows = [
   'abcdefghijklmnopqrstuvwxyz',
   '01234567890',
@@ -15,7 +14,7 @@ const rows = [
   'zxcvbnm',
   'yxcvbnm',
 ];
-const enoughOfOnesOwn = 8;
+const enoughOfOnesOwn = 6;
 const productName = 'bolewright';
 
 const plain = (text: string): string =>
@@ -24,9 +23,19 @@ const plain = (text: string): string =>
     .toLowerCase()
     .replace(/[^\p{L}\p{N}]+/gu, '');
 
-/** A shorter piece said again and again. */
-const isRepetition = (text: string): boolean =>
-  /^(.{1,8}?)\1+.{0,7}$/su.test(text) && new Set(text).size <= enoughOfOnesOwn;
+const common = new Set(dictionary['passwords'].map(plain));
+const isFigures = (text: string): boolean => /^\d*$/.test(text);
+const isOfCommon = (text: string): boolean =>
+  isFigures(text) || common.has(text) || common.has(text.replace(/\d+$/, ''));
+
+/** A shorter piece said again and again, the last time perhaps in part. */
+function isRepetition(text: string): boolean {
+  for (let length = 1; length * 2 <= text.length; length++) {
+    const piece = text.slice(0, length);
+    if (piece.repeat(Math.ceil(text.length / length)).startsWith(text)) return true;
+  }
+  return false;
+}
 
 /** Takes out runs of four and more along the alphabet, the figures or a keyboard, in either direction. */
 function withoutRuns(text: string): string {
@@ -42,18 +51,28 @@ function withoutRuns(text: string): string {
 const withoutPhrases = (text: string): string =>
   commonPhrases.reduce((rest, phrase) => rest.replaceAll(phrase, ''), text);
 
-/** Made of two common passwords, with or without figures around them. */
-function isPairOfCommon(text: string): boolean {
-  const letters = text.replace(/^\d+|\d+$/g, '');
-  if (common.has(text) || common.has(letters)) return true;
-  return [...letters].some((_, at) => at > 0 && common.has(letters.slice(0, at)) && common.has(letters.slice(at)));
+/** A common password, and after it figures or another one; figures may also stand before. */
+function isBuiltOnCommon(text: string): boolean {
+  const begun = text.replace(/^\d+(?=\p{L})/u, '');
+  return [text, begun].some((whole) =>
+    [...whole].some((_, at) => {
+      const rest = whole.slice(at + 1);
+      return common.has(whole.slice(0, at + 1)) && isOfCommon(rest);
+    }),
+  );
 }
 
 /** Whether a password is among those tried first: a common one, a row of keys, a saying, or little beside one. */
 function isCommon(password: string): boolean {
   const text = plain(password);
   const own = withoutPhrases(withoutRuns(text));
-  return new Set(own).size < 5 || own.length < enoughOfOnesOwn || isRepetition(text) || isPairOfCommon(text);
+  return (
+    isFigures(text) ||
+    new Set(own).size < 5 ||
+    own.length < enoughOfOnesOwn ||
+    isRepetition(text) ||
+    isBuiltOnCommon(text)
+  );
 }
 
 /** Words an attacker thinks of first: the product, the workshop, the person. */

@@ -27,6 +27,12 @@ function checkName(name: string, format: string): void {
   if (!fits || hidesAnother) throw new Rejection('unsupported', 'file-name-not-fitting');
 }
 
+/** What the file says of itself; nothing if it is no picture. */
+const factsOf = (bytes: Buffer) =>
+  Promise.resolve()
+    .then(() => sharp(bytes, { limitInputPixels: false }).metadata())
+    .catch(() => undefined);
+
 /**
  * A picture from outside, drawn anew: only its pixels are kept, neither metadata nor whatever else was in the file. Refuses what is
  * not a picture, what its name belies, and what would unpack to more than 60 megapixels.
@@ -36,9 +42,7 @@ export async function redrawn(upload: Upload | undefined, wanted: PictureWanted)
     throw new Rejection('invalid', 'problem-invalid', {
       complaints: [{ path: ['file'], code: 'upload-missing', values: {} }],
     });
-  const facts = await sharp(upload.bytes, { limitInputPixels: false })
-    .metadata()
-    .catch(() => undefined);
+  const facts = await factsOf(upload.bytes);
   if (!facts || !(facts.format in endings)) throw notReadable();
   if (facts.width * facts.height > mostMegapixels * 1_000_000) throw tooManyPixels();
   checkName(upload.name, facts.format);

@@ -1,5 +1,5 @@
 import express, { Router, type RequestHandler } from 'express';
-import multer from 'multer';
+import multer, { MulterError } from 'multer';
 import type { Endpoint } from '#shared/actor/endpoint';
 import { Rejection } from '#shared/problems/rejection';
 import { signedInOf } from './sessions';
@@ -16,7 +16,16 @@ const upload = multer({
 });
 const json = express.json({ limit: limits.body, strict: true });
 
-const reader = (endpoint: Endpoint): RequestHandler => (endpoint.upload ? upload.single(endpoint.upload) : json);
+/** What the reader of forms throws is about the form, not about us. */
+const form =
+  (field: string): RequestHandler =>
+  (request, response, next) => {
+    void upload.single(field)(request, response, (error: unknown) => {
+      next(error === undefined || error instanceof MulterError ? error : new Rejection('invalid', 'problem-invalid'));
+    });
+  };
+
+const reader = (endpoint: Endpoint): RequestHandler => (endpoint.upload ? form(endpoint.upload) : json);
 
 /** Before the body is read: what somebody may not send is not taken in. */
 const guarded =
