@@ -1,4 +1,4 @@
-import { Op, type WhereOptions } from 'sequelize';
+import { IndexHints, Op, type IndexHint, type WhereOptions } from 'sequelize';
 import { cursorAt, readCursor, type CursorKind } from './cursor';
 import type { Table } from './database';
 import type { SearchWords } from './search-words';
@@ -19,8 +19,12 @@ export interface ListAsked<R> extends PageAsked {
 interface Matching<R> {
   readonly where: WhereOptions<R>;
   readonly isBeyondCounting: boolean;
+  readonly indexHints: IndexHint[];
   readonly replacements: Record<string, unknown>;
 }
+
+/** A few rows known by their ids are fetched and sorted; the database would rather look for them all along the order. */
+const byId: IndexHint = { type: IndexHints.FORCE, values: ['PRIMARY'] };
 
 const countLimit = 1_000;
 
@@ -61,16 +65,19 @@ export class ListedRows<R extends WorkshopRow> extends WorkshopRows<R> {
     return {
       where: { [Op.and]: [{ workshopId }, ...(where ? [where] : []), ...found.where] } as WhereOptions<R>,
       isBeyondCounting: narrowing.isBeyondCounting && !where,
+      indexHints: narrowing.few ? [byId] : [],
       replacements: found.values,
     };
   }
 
-  private async rowsFrom({ order, cursor, limit }: ListAsked<R>, { where, replacements }: Matching<R>): Promise<R[]> {
+  private async rowsFrom({ order, cursor, limit }: ListAsked<R>, matching: Matching<R>): Promise<R[]> {
+    const { where, indexHints, replacements } = matching;
     const from = cursor === undefined ? [] : [beyond(order, cursor)];
     const rows = await this.table.findAll({
       where: { [Op.and]: [where, ...from] } as WhereOptions<R>,
       order: Object.keys(order.columns).map((column): [string, string] => [column, order.direction]),
       limit: limit + 1,
+      indexHints,
       replacements,
       raw: true,
     });
