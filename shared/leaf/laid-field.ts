@@ -10,11 +10,14 @@ export interface LaidField {
   readonly courses: readonly Course[];
 }
 
+/** All that decides the field: the surface, and the parts of the girth a zone takes by themselves. */
+type FieldInput = Pick<ZoneLeafInput, 'surface' | 'partKeys'>;
+
 // The run that gives the area with this girth, never shorter than measured: outer parts of a curved moulding run longer than its middle.
 const runFor = (area_mm2: number, girth_mm: number, run_mm: number): number =>
   girth_mm > 0 ? Math.max(area_mm2 / girth_mm, run_mm) : run_mm;
 
-function partsField({ surface }: ZoneLeafInput, keys: readonly string[]): LaidField {
+function partsField({ surface }: FieldInput, keys: readonly string[]): LaidField {
   const parts = surface.parts.filter((part) => keys.includes(part.key));
   const area_mm2 = parts.reduce((sum, part) => sum + part.area_mm2, 0);
   const girth_mm = parts.reduce((sum, part) => sum + part.girth_mm, 0);
@@ -22,7 +25,7 @@ function partsField({ surface }: ZoneLeafInput, keys: readonly string[]): LaidFi
   return { area_mm2, moulding: { girth_mm, run_mm, closedRun: surface.closedRun }, courses: [] };
 }
 
-function wholeMoulding({ surface }: ZoneLeafInput): MouldingRun | null {
+function wholeMoulding({ surface }: FieldInput): MouldingRun | null {
   const { area_mm2, girth_mm, run_mm, closedRun, courses } = surface;
   if (girth_mm !== undefined && run_mm !== undefined)
     return { girth_mm, run_mm: runFor(area_mm2, girth_mm, run_mm), closedRun };
@@ -33,7 +36,7 @@ function wholeMoulding({ surface }: ZoneLeafInput): MouldingRun | null {
 }
 
 /** The field a zone is laid on: a share is counted on the whole member and split afterwards, parts of the girth by themselves. */
-export function laidField(input: ZoneLeafInput): LaidField {
+export function laidField(input: FieldInput): LaidField {
   if (input.partKeys) return partsField(input, input.partKeys);
   return { area_mm2: input.surface.area_mm2, moulding: wholeMoulding(input), courses: input.surface.courses };
 }

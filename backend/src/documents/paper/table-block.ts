@@ -9,6 +9,9 @@ export type { TableCell, TableColumn, TableRow } from './table-layout';
 
 const ruleColours = { hair: paperColours.line, strong: paperColours.ink, gold: paperColours.gold } as const;
 
+/** Space between a table and what stands above it. */
+const above_pt = 5;
+
 /** Rows that must not be parted: each hangs on the one after it as long as it says so. */
 function chains(rows: readonly LaidRow[]): LaidRow[][] {
   const groups: LaidRow[][] = [];
@@ -84,11 +87,13 @@ export function tableBlock(pdf: Pdf, columns: readonly TableColumn[], rows: read
     : null;
   const groups = chains(laid);
   return {
-    lead_pt: (head?.height_pt ?? 0) + heightOf(groups[0] ?? []),
-    place: (flow) =>
+    lead_pt: above_pt + (head?.height_pt ?? 0) + heightOf(groups[0] ?? []),
+    place: (flow) => {
+      flow.space(above_pt);
       flow.inside('Table', () => {
         if (head) drawHead(flow, head, false);
         groups.forEach((group) => placeChain(flow, group, head));
-      }),
+      });
+    },
   };
 }

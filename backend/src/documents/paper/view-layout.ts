@@ -53,10 +53,9 @@ function marginOf(dimensions: readonly PlacedDimension[], side: DrawingDimension
 
 function layoutAt(
   view: DrawingView,
-  ratio: readonly [number, number],
+  { scale, ratio }: Pick<ViewLayout, 'scale' | 'ratio'>,
   setting: Omit<DimensionSetting, 'scale'>,
 ): ViewLayout {
-  const scale = (pointsPerMillimetre * ratio[0]) / ratio[1];
   const dimensions = dimensionPlaces(view, { ...setting, scale });
   const [above, below, left, right] = (['above', 'below', 'left', 'right'] as const).map((side) =>
     marginOf(dimensions, side),
@@ -68,13 +67,19 @@ function layoutAt(
   };
 }
 
+/** The largest recommended scale, in points a millimetre, at which something fits; the smallest where it fits at none. */
+export function fittingScale(fits: (scale: number) => boolean): Pick<ViewLayout, 'scale' | 'ratio'> {
+  const all = scales.map((ratio) => ({ ratio, scale: (pointsPerMillimetre * ratio[0]) / ratio[1] }));
+  return all.find(({ scale }) => fits(scale)) ?? all[all.length - 1];
+}
+
 /** The largest recommended scale at which a view with its dimensions fits a box in points; the smallest where none does. */
 export function viewLayout(
   view: DrawingView,
   box: { readonly width_pt: number; readonly height_pt: number },
   setting: Omit<DimensionSetting, 'scale'>,
 ): ViewLayout {
-  const layouts = scales.map((ratio) => layoutAt(view, ratio, setting));
-  const fitting = layouts.find((layout) => layout.width_pt <= box.width_pt && layout.height_pt <= box.height_pt);
-  return fitting ?? layouts[layouts.length - 1];
+  const isWithin = (layout: ViewLayout) => layout.width_pt <= box.width_pt && layout.height_pt <= box.height_pt;
+  const fitting = fittingScale((scale) => isWithin(layoutAt(view, { scale, ratio: [1, 1] }, setting)));
+  return layoutAt(view, fitting, setting);
 }
