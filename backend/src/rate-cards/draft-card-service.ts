@@ -56,11 +56,17 @@ export class DraftCardService {
     return after;
   }
 
+  /** The draft as somebody saw it, held until the transaction ends; refused where it stands otherwise. */
+  async standing({ workshopId }: Actor, seen: Seen): Promise<RateCardRow> {
+    const row = await this.parts.cards.lock(workshopId, seen.id);
+    refuseDated(row);
+    refuseStale(row, seen.version);
+    return row;
+  }
+
   /** Puts the content of a workbook in place of a draft's own. */
   async fill(actor: Actor, seen: Seen, content: RateCard): Promise<RateCardHead> {
-    const before = await this.parts.cards.lock(actor.workshopId, seen.id);
-    refuseDated(before);
-    refuseStale(before, seen.version);
+    const before = await this.standing(actor, seen);
     const after = await this.change(actor, before, { name: before.name, content });
     await this.parts.history.record(actor, after, { code: 'history-rate-card-filled' });
     return after;
@@ -68,9 +74,7 @@ export class DraftCardService {
 
   async remove(actor: Actor, { id, version }: Seen): Promise<void> {
     const { cards, history } = this.parts;
-    const card = await cards.lock(actor.workshopId, id);
-    refuseDated(card);
-    refuseStale(card, version);
+    const card = await this.standing(actor, { id, version });
     const copy = await cards.headBasedOn(actor.workshopId, id);
     if (copy) throw new Rejection('conflict', 'rate-card-copied', { values: { name: copy.name } });
     await cards.remove(actor.workshopId, id);

@@ -7,6 +7,7 @@ import { cardEffectsRoutes } from './card-effects-routes';
 import { CardEffectsService, type CardEffects } from './card-effects-service';
 import { CardHistory } from './card-history';
 import { CardInForceService } from './card-in-force-service';
+import { CardWorkbookService } from './card-workbook-service';
 import { DraftCardService } from './draft-card-service';
 import { RateCardRepository } from './rate-card-repository';
 import { rateCardRoutes } from './rate-card-routes';
@@ -45,6 +46,7 @@ export function openRateCards(platform: Platform, { accounts, audit, effects: wo
     ...{ cards, tasks, clock, workOut },
     effects: new CardEffectsRepository(database),
   });
-  const routes = [...rateCardRoutes({ cards: service, drafts, inForce }), ...cardEffectsRoutes(effects)];
+  const workbooks = new CardWorkbookService({ cards, drafts, workshops: accounts.workshops });
+  const routes = [...rateCardRoutes({ cards: service, drafts, inForce, workbooks }), ...cardEffectsRoutes(effects)];
   return { service, drafts, inForce, routes };
 }

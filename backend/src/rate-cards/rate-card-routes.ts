@@ -1,5 +1,7 @@
 import {
   copyRateCard,
+  exportRateCard,
+  importRateCard,
   keepRateCard,
   listRateCards,
   putRateCardInForce,
@@ -10,6 +12,7 @@ import {
 } from '#shared/rate-cards/rate-cards-endpoints';
 import { mount, type Route } from '../platform/http/mount';
 import type { CardInForceService } from './card-in-force-service';
+import type { CardWorkbookService } from './card-workbook-service';
 import type { DraftCardService } from './draft-card-service';
 import type { RateCardHead, RateCardRow } from './rate-card-model';
 import { presentRateCard, presentWholeRateCard } from './rate-card-presenter';
@@ -19,6 +22,7 @@ interface Parts {
   readonly cards: RateCardService;
   readonly drafts: DraftCardService;
   readonly inForce: CardInForceService;
+  readonly workbooks: CardWorkbookService;
 }
 
 type Presented = (head: RateCardHead) => Promise<ReturnType<typeof presentRateCard>>;
@@ -48,32 +52,51 @@ const readingRoutes = (cards: RateCardService): Route[] => [
   }),
 ];
 
-export const rateCardRoutes = ({ cards, drafts, inForce }: Parts): Route[] => {
+const dayRoutes = (inForce: CardInForceService, present: Presented): Route[] => [
+  mount(
+    putRateCardInForce,
+    async ({ actor, params, version, body }) =>
+      present(await inForce.put(actor, { id: params.rateCardId, version }, body.from)),
+    presentCurrent,
+  ),
+  mount(
+    takeRateCardBack,
+    async ({ actor, params, version }) => present(await inForce.takeBack(actor, { id: params.rateCardId, version })),
+    presentCurrent,
+  ),
+];
+
+const draftRoutes = (drafts: DraftCardService, present: Presented): Route[] => [
+  mount(copyRateCard, async ({ actor, params, body }) => present(await drafts.copy(actor, params.rateCardId, body))),
+  mount(
+    keepRateCard,
+    async ({ actor, params, version, body }) =>
+      present(await drafts.keep(actor, { id: params.rateCardId, version }, body)),
+    presentCurrent,
+  ),
+  mount(
+    removeRateCard,
+    ({ actor, params, version }) => drafts.remove(actor, { id: params.rateCardId, version }),
+    presentCurrent,
+  ),
+];
+
+const workbookRoutes = (workbooks: CardWorkbookService, present: Presented): Route[] => [
+  mount(exportRateCard, ({ actor, params }) => workbooks.export(actor.workshopId, params.rateCardId)),
+  mount(
+    importRateCard,
+    async ({ actor, params, version, upload }) =>
+      present(await workbooks.import(actor, { id: params.rateCardId, version }, upload)),
+    presentCurrent,
+  ),
+];
+
+export const rateCardRoutes = ({ cards, drafts, inForce, workbooks }: Parts): Route[] => {
   const present = presenterFor(cards);
   return [
     ...readingRoutes(cards),
-    mount(copyRateCard, async ({ actor, params, body }) => present(await drafts.copy(actor, params.rateCardId, body))),
-    mount(
-      keepRateCard,
-      async ({ actor, params, version, body }) =>
-        present(await drafts.keep(actor, { id: params.rateCardId, version }, body)),
-      presentCurrent,
-    ),
-    mount(
-      removeRateCard,
-      ({ actor, params, version }) => drafts.remove(actor, { id: params.rateCardId, version }),
-      presentCurrent,
-    ),
-    mount(
-      putRateCardInForce,
-      async ({ actor, params, version, body }) =>
-        present(await inForce.put(actor, { id: params.rateCardId, version }, body.from)),
-      presentCurrent,
-    ),
-    mount(
-      takeRateCardBack,
-      async ({ actor, params, version }) => present(await inForce.takeBack(actor, { id: params.rateCardId, version })),
-      presentCurrent,
-    ),
+    ...draftRoutes(drafts, present),
+    ...dayRoutes(inForce, present),
+    ...workbookRoutes(workbooks, present),
   ];
 };

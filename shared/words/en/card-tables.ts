@@ -56,7 +56,7 @@ export const cardTables = {
   'card-range-cleaning': 'Cleaning, a m²',
   'card-range-spread': 'Spread of hands-on gilding',
   'card-column-id': 'Id',
-  'card-column-of': 'Of {table}',
+  'card-column-of': 'Id in {table}',
   'card-column-row': 'Row',
   'card-column-figure': 'Figure',
   'card-column-value': 'Value',
