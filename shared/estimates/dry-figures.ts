@@ -38,16 +38,26 @@ export interface DryFigures extends Omit<JobSequence, 'tasks' | 'lots' | 'findin
   readonly siteMoisture_percent: number;
 }
 
+/** Carving of each member before it is sized; recutting comes later, as a step of its lot. */
+function carvingByMember({ labour, zones }: EstimateWork): Map<string, number> {
+  const hours = new Map<string, number>();
+  const add = (memberId: string, more: number) => hours.set(memberId, (hours.get(memberId) ?? 0) + more);
+  for (const entry of labour) if (entry.memberId && entry.kind === 'carving') add(entry.memberId, entry.hours);
+  for (const { memberId, facts } of zones) add(memberId, -facts.recutting_hours);
+  return hours;
+}
+
 /** One carver works through the members in the order of the lots; a lot is ready when all its members are carved. */
 function readyTimes(work: EstimateWork, time: WorkingTime): Record<string, number> {
-  const carved = new Set<string>();
+  const toCarve = carvingByMember(work);
+  const memberOf = new Map(work.zones.map(({ facts, memberId }) => [facts.id, memberId]));
   let hours = 0;
   const ready: Record<string, number> = {};
   for (const lot of work.lots) {
-    for (const zone of work.zones.filter(({ facts }) => lot.zoneIds.includes(facts.id))) {
-      if (carved.has(zone.memberId)) continue;
-      carved.add(zone.memberId);
-      hours += memberCarving(work, zone.memberId);
+    for (const zoneId of lot.zoneIds) {
+      const memberId = memberOf.get(zoneId) ?? '';
+      hours += toCarve.get(memberId) ?? 0;
+      toCarve.delete(memberId);
     }
     const clock = countUp((hours * 60 * 100) / time.productiveShare_percent);
     ready[lot.id] = clock === 0 ? 0 : endOfWork(0, clock, time);
@@ -55,21 +65,13 @@ function readyTimes(work: EstimateWork, time: WorkingTime): Record<string, numbe
   return ready;
 }
 
-const memberCarving = (work: EstimateWork, memberId: string): number =>
-  work.labour
-    .filter((entry) => entry.memberId === memberId && entry.kind === 'carving')
-    .reduce((sum, entry) => sum + entry.hours, 0);
-
-function dryLot(sequence: LotSequence, job: JobSequence, work: EstimateWork): DryLot {
-  const span = job.lots.find((one) => one.lotId === sequence.lotId);
-  const zone = work.zones.find(({ facts }) => facts.buildUpId === sequence.buildUpId);
+function dryLot(sequence: LotSequence, span: LotSpan, { buildUps }: RateCard): DryLot {
   const { lotId, pieceId, buildUpId, steps, handsOn_minutes, drying_minutes } = sequence;
+  const { start_minutes, end_minutes, waiting_minutes } = span;
   return {
     ...{ lotId, pieceId, buildUpId, steps, handsOn_minutes, drying_minutes },
-    buildUp: zone?.buildUp?.name ?? buildUpId,
-    start_minutes: span?.start_minutes ?? 0,
-    end_minutes: span?.end_minutes ?? 0,
-    waiting_minutes: span?.waiting_minutes ?? 0,
+    buildUp: buildUps.buildUps.find((known) => known.id === buildUpId)?.name ?? buildUpId,
+    ...{ start_minutes, end_minutes, waiting_minutes },
   };
 }
 
@@ -95,7 +97,7 @@ export function dryFigures(
     time,
     shopMoisture_percent: wood.from_percent,
     siteMoisture_percent: wood.to_percent,
-    lots: sequences.map((sequence) => dryLot(sequence, job, work)),
+    lots: sequences.map((sequence, place) => dryLot(sequence, job.lots[place], card)),
     tasks: job.tasks.map(({ lotId, step, coat, portion, start_minutes, end_minutes, handsOn_minutes }) => ({
       ...{ lotId, stepId: step.stepId, coat, portion, start_minutes, end_minutes, handsOn_minutes },
     })),
