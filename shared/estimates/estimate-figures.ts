@@ -82,10 +82,11 @@ export function prepareEstimate(input: EstimateInput): PreparedEstimate {
   return { ...prepared, risk: riskInput(prepared), needsRisk };
 }
 
-function priceFrom(prepared: PreparedEstimate, risk: Risk | null): Price {
+/** All that the price of a prepared estimate is worked from, contingency by share or as the risk found it (0 without risk). */
+export function pricedFrom(prepared: PreparedEstimate, risk: Risk | null): PriceInput {
   const { way, percent } = contingencyOf(prepared.draft.settings, prepared.input.card);
   const fromRisk = { way: 'risk' as const, amount_minor: risk?.contingency_minor ?? 0 };
-  return priceOf(priceInput(prepared, way === 'share' ? { way, percent } : fromRisk));
+  return priceInput(prepared, way === 'share' ? { way, percent } : fromRisk);
 }
 
 function purchases({ leaf, goods }: EstimateWork): PurchaseFigures[] {
@@ -108,7 +109,7 @@ const costFigures = (work: EstimateWork, price: Price, risk: Risk | null): CostF
 /** All figures of a prepared estimate: money in whole minor units, stages of the gross price. Without risk, a contingency from risk is 0. */
 export function estimateFigures(prepared: PreparedEstimate, risk: Risk | null): Figures {
   const { work, input, draft } = prepared;
-  const price = priceFrom(prepared, risk);
+  const price = priceOf(pricedFrom(prepared, risk));
   const { deposit_percent, parts, retention_percent } = draft.settings.stages;
   const stages_percent = parts.length > 0 ? parts.map((part) => part.percent) : [100];
   return {
