@@ -35,7 +35,10 @@ export function openApp(platform: Platform, catcher?: MailCatcher): App {
   });
   const jobs = openJobs(platform, {
     ...{ audit, accounts },
-    hasIssues: (workshopId, jobId) => estimates.hasIssues(workshopId, jobId),
+    estimates: {
+      hasIssues: (workshopId, jobId) => estimates.drafts.hasIssues(workshopId, jobId),
+      dropDrafts: (workshopId, jobId) => estimates.drafts.drop(workshopId, jobId),
+    },
   });
   const estimates: Estimates = openEstimates(platform, { accounts, audit, rateCards, jobs, papers });
   const routes = [...audit.routes, ...accounts.routes, ...rateCards.routes, ...jobs.routes, ...estimates.routes];

@@ -7,6 +7,10 @@ export class ContentRepository<R extends VersionedRow & { readonly estimateId: s
   ofEstimate(workshopId: string, estimateId: string): Promise<R[]> {
     return this.list(workshopId, { where: { estimateId } as never });
   }
+
+  async removeOf(workshopId: string, estimateId: string): Promise<void> {
+    await this.table.destroy({ where: { workshopId, estimateId } as never });
+  }
 }
 
 export const pieceRepository = (database: Database) =>

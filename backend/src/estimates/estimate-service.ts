@@ -22,6 +22,7 @@ import type { ContentRepository } from './content-repository';
 import type { EstimateRow } from './estimate-model';
 import { presentEstimate } from './estimate-presenter';
 import type { EstimateRepository } from './estimate-repository';
+import type { PresenceRepository } from './presence-repository';
 import type { ReadingService } from './reading-service';
 import { workedEstimate, type WholeEstimate } from './worked-estimate';
 
@@ -29,6 +30,7 @@ export interface EstimateParts {
   readonly estimates: EstimateRepository;
   readonly pieces: ContentRepository<PieceContentRow>;
   readonly members: ContentRepository<MemberContentRow>;
+  readonly presences: PresenceRepository;
   readonly readings: ReadingService;
   readonly changes: ChangeService;
   readonly cards: RateCardService;
@@ -123,6 +125,22 @@ export class EstimateService {
       .filter((row) => changes.some((change) => change.id === row.id))
       .map((row) => ({ id: row.id, version: row.version }));
     return { version: whole.estimate.version, versions, figures } as KeptChanges;
+  }
+
+  /** Whether anything of a job was issued. */
+  async hasIssues(workshopId: string, jobId: string): Promise<boolean> {
+    return (await this.parts.estimates.ofJob(workshopId, jobId)).some((estimate) => estimate.letter !== null);
+  }
+
+  /** Removes the drafts of a job of which nothing was issued, with all that stands in them. */
+  async drop(workshopId: string, jobId: string): Promise<void> {
+    for (const { id } of await this.parts.estimates.ofJob(workshopId, jobId)) {
+      await this.parts.presences.forget(workshopId, id);
+      await this.parts.readings.forget(workshopId, id);
+      await this.parts.members.removeOf(workshopId, id);
+      await this.parts.pieces.removeOf(workshopId, id);
+      await this.parts.estimates.remove(workshopId, id);
+    }
   }
 
   /** Works the estimate on the card in force from now on. */

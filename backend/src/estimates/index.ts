@@ -26,8 +26,6 @@ export type { IssueService } from './issue-service';
 export interface Estimates {
   readonly drafts: EstimateService;
   readonly issues: IssueService;
-  /** Whether anything of a job was issued. */
-  readonly hasIssues: (workshopId: string, jobId: string) => Promise<boolean>;
   /** What another rate card does to every open estimate. */
   readonly cardEffects: CardEffects;
   readonly routes: readonly Route[];
@@ -55,7 +53,8 @@ export function openEstimates({ database, clock, files }: Platform, needs: Estim
     clock,
   };
   const readings = new ReadingService(new ReadingRepository(database));
-  const drafts = new EstimateService({ ...parts, readings, changes: new ChangeService(parts) });
+  const presences = new PresenceRepository(database);
+  const drafts = new EstimateService({ ...parts, presences, readings, changes: new ChangeService(parts) });
   const issues = new IssueService({
     ...parts,
     drafts,
@@ -63,10 +62,8 @@ export function openEstimates({ database, clock, files }: Platform, needs: Estim
     files,
     papers: needs.papers,
   });
-  const presences = new PresenceService({ ...parts, presences: new PresenceRepository(database) });
-  const hasIssues = async (workshopId: string, jobId: string): Promise<boolean> =>
-    (await drafts.ofJob(workshopId, jobId)).some((estimate) => estimate.letter !== null);
+  const presence = new PresenceService({ ...parts, presences });
   const effects = cardEffects({ drafts, jobs: needs.jobs, cards: needs.rateCards.service });
-  const routes = [...estimateRoutes(drafts, presences), ...issueRoutes(issues)];
-  return { drafts, issues, hasIssues, cardEffects: effects, routes };
+  const routes = [...estimateRoutes(drafts, presence), ...issueRoutes(issues)];
+  return { drafts, issues, cardEffects: effects, routes };
 }

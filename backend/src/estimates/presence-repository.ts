@@ -28,6 +28,10 @@ export class PresenceRepository {
     await this.table.upsert({ ...presence, workshopId });
   }
 
+  async forget(workshopId: string, estimateId: string): Promise<void> {
+    await this.table.destroy({ where: { workshopId, estimateId } });
+  }
+
   async others(workshopId: string, at: { estimateId: string; membershipId: string }, since: Date): Promise<string[]> {
     const { estimateId, membershipId } = at;
     const where = { workshopId, estimateId, membershipId: { [Op.ne]: membershipId }, seenAt: { [Op.gt]: since } };

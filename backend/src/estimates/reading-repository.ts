@@ -15,6 +15,10 @@ export class ReadingRepository {
     return (row as unknown as ReadingRow | null) ?? undefined;
   }
 
+  async forget(workshopId: string, id: string): Promise<void> {
+    await this.table.destroy({ where: { workshopId, id } });
+  }
+
   async put(workshopId: string, rows: readonly Omit<ReadingRow, 'workshopId'>[]): Promise<void> {
     const whole = rows.map((row) => ({ ...row, workshopId }));
     await this.table.bulkCreate(whole, { updateOnDuplicate: ['version', 'calculatorVersion', 'bytes'] });

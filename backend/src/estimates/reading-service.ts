@@ -29,6 +29,10 @@ export class ReadingService {
     await this.readings.put(workshopId, rows);
   }
 
+  forget(workshopId: string, id: string): Promise<void> {
+    return this.readings.forget(workshopId, id);
+  }
+
   /** The kept bytes, unless another calculator made them. */
   async find(workshopId: string, id: string, audience: Audience): Promise<PreparedAnswer | undefined> {
     const row = await this.readings.find(workshopId, id, audience);

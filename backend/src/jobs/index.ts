@@ -11,7 +11,7 @@ import { clientsRoutes } from './clients-routes';
 import { JobHistory } from './job-history';
 import type { NamedJobRow } from './job-model';
 import { JobRepository } from './job-repository';
-import { JobService, type HasIssues } from './job-service';
+import { JobService, type JobEstimates } from './job-service';
 import { JobStateService } from './job-state-service';
 import { jobsRoutes } from './jobs-routes';
 import { NamedJobs } from './named-jobs';
@@ -20,7 +20,7 @@ export type { ClientRow } from './client-model';
 export type { ClientService } from './client-service';
 export type { NamedJobRow } from './job-model';
 export { jobNumber } from './job-number';
-export type { HasIssues, JobService } from './job-service';
+export type { JobEstimates, JobService } from './job-service';
 
 /** What other features and the start data may ask of this one. */
 export interface Jobs {
@@ -40,16 +40,16 @@ export interface Jobs {
 export interface JobsParts {
   readonly audit: Audit;
   readonly accounts: Accounts;
-  readonly hasIssues: HasIssues;
+  readonly estimates: JobEstimates;
 }
 
 /** Clients and their jobs. */
-export function openJobs({ database, clock }: Platform, { audit, accounts, hasIssues }: JobsParts): Jobs {
+export function openJobs({ database, clock }: Platform, { audit, accounts, estimates }: JobsParts): Jobs {
   const clients = new ClientRepository(database);
   const jobs = new JobRepository(database);
   const base = { clients, jobs, clock, named: new NamedJobs(jobs, clients), history: new JobHistory(audit.service) };
   const counters = new Counters(database);
-  const service = new JobService({ ...base, counters, workshops: accounts.workshops, hasIssues });
+  const service = new JobService({ ...base, counters, workshops: accounts.workshops, estimates });
   const states = new JobStateService(base);
   const clientService = new ClientService({ ...base, audit: audit.service });
   return {

@@ -15,8 +15,13 @@ import { presentJobContent } from './job-presenter';
 import type { JobRepository, JobsAsked } from './job-repository';
 import type { NamedJobs } from './named-jobs';
 
-/** Whether an estimate of a job was issued; `estimates` supplies it. */
-export type HasIssues = (workshopId: string, jobId: string) => Promise<boolean>;
+/** What jobs ask of the estimates, which stand after them. */
+export interface JobEstimates {
+  /** Whether anything of the job was issued. */
+  readonly hasIssues: (workshopId: string, jobId: string) => Promise<boolean>;
+  /** Removes the drafts of a job of which nothing was issued. */
+  readonly dropDrafts: (workshopId: string, jobId: string) => Promise<void>;
+}
 
 interface Parts {
   readonly jobs: JobRepository;
@@ -26,7 +31,7 @@ interface Parts {
   readonly workshops: Pick<WorkshopService, 'get'>;
   readonly history: JobHistory;
   readonly clock: Clock;
-  readonly hasIssues: HasIssues;
+  readonly estimates: JobEstimates;
 }
 
 /** The jobs of a workshop: found, opened, changed and removed. */
@@ -56,10 +61,11 @@ export class JobService {
 
   /** Removes a job of which nothing was issued. */
   async remove(actor: Actor, { id, version }: Seen): Promise<void> {
-    const { jobs, named, clients, history, hasIssues } = this.parts;
+    const { jobs, named, clients, history, estimates } = this.parts;
     const job = await named.lock(actor.workshopId, id);
     refuseStale(job, version);
-    if (await hasIssues(actor.workshopId, id)) throw new Rejection('conflict', 'job-has-issues');
+    if (await estimates.hasIssues(actor.workshopId, id)) throw new Rejection('conflict', 'job-has-issues');
+    await estimates.dropDrafts(actor.workshopId, id);
     await jobs.removeWords(actor.workshopId, id);
     await jobs.remove(actor.workshopId, id);
     await clients.countJobs(actor.workshopId, job.clientId, -1);
