@@ -77,7 +77,11 @@ const stagesSchema = z
       ...complain('stages-not-whole'),
       path: ['parts'],
     },
-  );
+  )
+  .refine((stages) => stages.deposit_percent + stages.retention_percent <= 100, {
+    ...complain('stages-withhold-too-much'),
+    path: ['retention_percent'],
+  });
 
 /** What is entered of an estimate as a whole. */
 export const settingsSchema = z.strictObject({

@@ -1,6 +1,7 @@
 export const estimates = {
   'zone-shares-over': 'The shares of this member come to more than 100 %.',
   'zone-leaf-missing': 'Choose the leaf that is laid on {zone}.',
+  'stages-withhold-too-much': 'Deposit and retention together cannot be more than the contract.',
   'stages-not-whole': 'The stages must come to 100 % together.',
   'piece-unknown': 'Choose a piece of this estimate.',
   'piece-has-members': '{piece} still has members; move or remove them first.',

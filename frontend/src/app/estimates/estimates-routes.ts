@@ -1,5 +1,8 @@
 import type { Routes } from '@angular/router';
+import { roleGuard } from '../core/session/role-guard';
 import { leaveGuard } from '../ui/dialog/leave-guard';
+
+const seesPrices = roleGuard('owner', 'estimator', 'office');
 
 /** The places of an estimate, under `/jobs/:jobId/estimates/:estimateId`; each is loaded when it is first opened. */
 export const estimatesRoutes: Routes = [
@@ -13,6 +16,12 @@ export const estimatesRoutes: Routes = [
         path: 'measure',
         title: $localize`Measure`,
         loadComponent: () => import('./measure-page').then(({ MeasurePage }) => MeasurePage),
+      },
+      {
+        path: 'price',
+        title: $localize`Price`,
+        canMatch: [seesPrices],
+        loadComponent: () => import('./price/price-page').then(({ PricePage }) => PricePage),
       },
     ],
   },

@@ -65,6 +65,13 @@ export class Formats {
     return format.format(textOf(amount_minor, this.currencyDigits()) as unknown as number);
   }
 
+  /** Money without its sign, for a column whose heading has it. */
+  amount(amount_minor: MinorUnits): string {
+    const digits = { minimumFractionDigits: this.currencyDigits(), maximumFractionDigits: this.currencyDigits() };
+    const format = new Intl.NumberFormat(this.locale(), { numberingSystem: 'latn', ...digits });
+    return format.format(textOf(amount_minor, this.currencyDigits()) as unknown as number);
+  }
+
   /** A plain number with at most and at least so many decimals, grouped as the locale has it. */
   number(figure: number, most = 2, least = 0): string {
     const digits = { minimumFractionDigits: least, maximumFractionDigits: most };

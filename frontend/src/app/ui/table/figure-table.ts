@@ -38,6 +38,8 @@ export class FigureTable<Row> {
   readonly columns = input.required<readonly FigureColumn<Row>[]>();
   readonly rows = input.required<readonly Row[]>();
   readonly rowId = input.required<(row: Row) => string>();
+  /** Rows that stand over those below them, which are then set in. */
+  readonly isHead = input<(row: Row) => boolean>();
   /** The bottom line, by the keys of the columns. */
   readonly totals = input<Readonly<Record<string, string>>>();
   /** Rows can be chosen; the chosen one is tinted. */
@@ -49,7 +51,10 @@ export class FigureTable<Row> {
   protected readonly place = signal<GridPlace>({ row: 0, column: 0 });
   protected readonly draft = signal<string | undefined>(undefined);
   protected readonly lines = computed(() =>
-    this.rows().map((row, index) => ({ row, id: this.rowId()(row), cells: this.cellsOf(row, index) })),
+    this.rows().map((row, index) => {
+      const isHead = this.isHead()?.(row);
+      return { row, id: this.rowId()(row), isHead, cells: this.cellsOf(row, index) };
+    }),
   );
   protected readonly footer = computed(() =>
     this.columns().map((column, index) => ({

@@ -1,0 +1,78 @@
+import { Injectable, computed, inject, signal } from '@angular/core';
+import { takeUntilDestroyed, toObservable } from '@angular/core/rxjs-interop';
+import { type Observable, debounceTime, forkJoin, map, of, switchMap } from 'rxjs';
+import type { Choice, Draft } from '#shared/estimates/draft';
+import { type EstimateInput, estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
+import type { Figures } from '#shared/estimates/figures';
+import type { RateCard } from '#shared/rate-cards/rate-card';
+import { EstimateStore } from '../estimate-store';
+import { drawnBy } from '../figures/drawn-risk';
+import { RISK_STARTER } from '../figures/risk-starter';
+import type { WorkerStarter } from '../../core/workers/worker-token';
+
+/** What an alternative by itself makes of the price, gross, against the base. */
+export interface AlternativeTotal {
+  readonly id: string;
+  readonly gross_minor: number;
+  readonly difference_minor: number;
+}
+
+const afterTheLastKey_ms = 400;
+
+/** Works an estimate; where contingency comes from risk it is drawn in a worker first. */
+export function workedBy(start: WorkerStarter, input: EstimateInput): Observable<Figures> {
+  const prepared = prepareEstimate(input);
+  if (!prepared.needsRisk) return of(estimateFigures(prepared, null));
+  return drawnBy(start, prepared.risk).pipe(map(({ risk }) => estimateFigures(prepared, risk)));
+}
+
+interface Asked {
+  readonly draft: Draft;
+  readonly card: RateCard;
+  readonly currency: string;
+}
+
+/** Each alternative worked by itself, and its difference to the base, as an issue would freeze it. */
+@Injectable()
+export class AlternativeTotals {
+  private readonly store = inject(EstimateStore);
+  private readonly startRisk = inject(RISK_STARTER);
+  private readonly worked = signal<{ readonly asked: Asked; readonly totals: readonly AlternativeTotal[] } | undefined>(
+    undefined,
+  );
+
+  private readonly asked = computed<Asked | undefined>(() => {
+    const [draft, card, currency] = [this.store.draft(), this.store.card(), this.store.head()?.currency];
+    const isAsked = draft !== undefined && draft.settings.alternatives.length > 0;
+    return isAsked && card && currency ? { draft, card, currency } : undefined;
+  });
+  /** What was worked last, by id; the figures of a moment ago while `isPending`. */
+  readonly totals = computed(() => new Map((this.worked()?.totals ?? []).map((total) => [total.id, total])));
+  readonly isPending = computed(() => this.asked() !== undefined && this.worked()?.asked !== this.asked());
+
+  constructor() {
+    toObservable(this.asked)
+      .pipe(
+        debounceTime(afterTheLastKey_ms),
+        switchMap((asked) => (asked ? this.work(asked) : of(undefined))),
+        takeUntilDestroyed(),
+      )
+      .subscribe((worked) => this.worked.set(worked));
+  }
+
+  private work(asked: Asked) {
+    const ids = asked.draft.settings.alternatives.map(({ id }) => id);
+    const gross = (choice: Choice) =>
+      workedBy(this.startRisk, { ...asked, choice }).pipe(map((figures) => figures.price.gross_minor));
+    return forkJoin([gross([]), ...ids.map((id) => gross([id]))]).pipe(
+      map(([base, ...others]) => ({
+        asked,
+        totals: ids.map((id, place) => ({
+          id,
+          gross_minor: others[place],
+          difference_minor: others[place] - base,
+        })),
+      })),
+    );
+  }
+}

@@ -1,0 +1,81 @@
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import { Router } from '@angular/router';
+import { Formats } from '../../core/formats/formats';
+import { ReasonPanel } from '../../ui/figure/reason-panel';
+import { FindingList } from '../../ui/page/finding-list';
+import { EstimateStore } from '../estimate-store';
+import { PartList } from '../parts/part-list';
+import { PartPlace } from '../parts/part-place';
+import { AlternativesPart } from './alternatives-part';
+import { CardPart } from './card-part';
+import { CardsInUse } from './cards-in-use';
+import { ExtrasPart } from './extras-part';
+import { MoneyBar } from './money-bar';
+import { PresentationChoice } from './presentation-choice';
+import { PriceLines } from './price-lines';
+import { pricePartKeys, PriceParts, type PricePartKey } from './price-parts';
+import { ProfitForm } from './profit-form';
+import { StagesPart } from './stages-part';
+
+/** Price: what the estimate comes to, in parts; where the money goes and why stay beside them. */
+@Component({
+  selector: 'app-price-page',
+  imports: [
+    AlternativesPart,
+    CardPart,
+    ExtrasPart,
+    FindingList,
+    MatButton,
+    MoneyBar,
+    PartList,
+    PartPlace,
+    PresentationChoice,
+    PriceLines,
+    ProfitForm,
+    ReasonPanel,
+    StagesPart,
+  ],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  providers: [CardsInUse, PriceParts],
+  templateUrl: './price-page.html',
+  styleUrl: './price-page.scss',
+})
+export class PricePage {
+  private readonly formats = inject(Formats);
+  private readonly router = inject(Router);
+  protected readonly store = inject(EstimateStore);
+  protected readonly parts = inject(PriceParts);
+
+  /** The part the address asks for. */
+  readonly part = input<string>();
+
+  protected readonly open = computed<PricePartKey>(() => {
+    const offered = this.parts.parts().map(({ key }) => key);
+    return pricePartKeys.find((key) => key === this.part() && offered.includes(key)) ?? 'lines';
+  });
+  protected readonly heading = computed(() => this.parts.parts().find(({ key }) => key === this.open())?.name ?? '');
+  protected readonly memberNames = computed(() => new Map(this.store.members().map(({ id, name }) => [id, name])));
+  protected readonly presentation = computed(() => this.store.settings()?.presentation ?? 'members');
+  protected readonly findings = computed(() => this.store.costed()?.cost.findings ?? []);
+  /** Names of the alternatives the figures are shown with. */
+  protected readonly choice = computed(() => {
+    const chosen = this.store.choice();
+    const alternatives = this.store.settings()?.alternatives ?? [];
+    return alternatives.filter(({ id }) => chosen.includes(id)).map(({ name }) => name);
+  });
+  protected readonly taxName = computed(() => {
+    const names = new Map((this.store.card()?.money.taxCategories ?? []).map(({ id, name }) => [id, name]));
+    return (taxCategoryId: string) => names.get(taxCategoryId) ?? '';
+  });
+  protected readonly net = computed(() => this.formats.money(this.store.priced()?.price.net_minor ?? 0));
+
+  protected present(presentation: 'members' | 'kinds'): void {
+    this.store.changeSettings({ presentation });
+  }
+
+  /** A house value is changed where it stands, in the rate card. */
+  protected openCard(value: string): void {
+    void this.router.navigate(['/rates', this.store.head()?.rateCardId], { queryParams: { value } });
+  }
+}

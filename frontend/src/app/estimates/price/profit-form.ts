@@ -1,0 +1,109 @@
+import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { ReactiveFormsModule } from '@angular/forms';
+import type { EstimateSettings } from '#shared/estimates/settings';
+import type { Contingency, Profit } from '#shared/rate-cards/money-card';
+import { Formats } from '../../core/formats/formats';
+import { DecimalField } from '../../ui/field/decimal-field';
+import { Entry } from '../../ui/field/entry';
+import { Field } from '../../ui/field/field';
+import { FindingList } from '../../ui/page/finding-list';
+import { EstimateStore } from '../estimate-store';
+import { liveForm } from '../settings/live-form';
+import {
+  noProfitEntries,
+  profitEntriesOf,
+  profitFormSchema,
+  profitSaidAs,
+  profitSettingsOf,
+  type ProfitEntries,
+} from './profit-entries';
+import { ProfitFigures } from './profit-figures';
+import { RiskTable } from './risk-table';
+
+/** Profit, contingency, discount and tax of the estimate, and what is left; each follows the rate card unless it is entered here. */
+@Component({
+  selector: 'app-profit-form',
+  imports: [DecimalField, Entry, Field, FindingList, ProfitFigures, ReactiveFormsModule, RiskTable],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './profit-form.html',
+  styles: `
+    :host {
+      display: grid;
+      gap: 24px;
+    }
+  `,
+})
+export class ProfitForm {
+  private readonly formats = inject(Formats);
+  protected readonly store = inject(EstimateStore);
+
+  protected readonly live = liveForm(
+    {
+      key: () => 'profit',
+      schema: profitFormSchema,
+      present: () => this.entries(),
+      apply: (value) => this.store.changeSettings(profitSettingsOf(value)),
+    },
+    noProfitEntries,
+  );
+
+  private readonly money = computed(() => this.store.card()?.money);
+  protected readonly entries = computed<ProfitEntries | undefined>(() => {
+    const settings = this.store.settings();
+    return settings?.extras ? profitEntriesOf(settings as EstimateSettings) : undefined;
+  });
+  protected readonly cost = computed(() => this.store.costed()?.cost);
+  protected readonly belowCost = computed(() =>
+    (this.cost()?.findings ?? []).filter(({ code }) => code === 'price-below-cost' || code === 'price-below-nothing'),
+  );
+  protected readonly taxCategories = computed(() =>
+    (this.money()?.taxCategories ?? []).map(({ id, name, percent }) => ({
+      id,
+      label: `${name}, ${this.percent(percent)}`,
+    })),
+  );
+  protected readonly cardProfit = computed(() => this.profitInWords(this.money()?.profit));
+  protected readonly cardContingency = computed(() => this.contingencyInWords(this.money()?.contingency));
+  protected readonly leafNames = computed(
+    () => new Map((this.store.figures()?.leaf ?? []).map(({ productId, name }) => [productId, name])),
+  );
+  protected readonly percentile = computed(() => this.money()?.contingency.percentile ?? 80);
+
+  /** Changing the way keeps the price where it is. */
+  protected takeProfitWay(): void {
+    const { profit, profit_percent } = this.live.group.getRawValue();
+    const before = this.store.settings()?.profit ?? this.money()?.profit;
+    if (before && profit && profit !== 'card' && !(profit_percent ?? '').startsWith('?'))
+      this.live.group.patchValue({ profit_percent: profitSaidAs(profit, before) });
+  }
+
+  /** A share of its own begins with that of the card. */
+  protected takeContingencyWay(): void {
+    const { contingency, contingency_percent } = this.live.group.getRawValue();
+    const percent = this.money()?.contingency.percent ?? '0';
+    if (contingency === 'share' && !contingency_percent) this.live.group.patchValue({ contingency_percent: percent });
+  }
+
+  /** A percentage and an amount are not the same figure: it is asked for anew. */
+  protected takeDiscountWay(): void {
+    this.live.group.patchValue({ discountAmount: '' });
+  }
+
+  private profitInWords(profit: Profit | undefined): string {
+    if (!profit) return '';
+    const percent = this.percent(profit.percent);
+    return profit.way === 'margin'
+      ? $localize`margin of ${percent}:percent:`
+      : $localize`mark-up of ${percent}:percent:`;
+  }
+
+  private contingencyInWords(contingency: Contingency | undefined): string {
+    if (!contingency) return '';
+    if (contingency.way === 'risk') return $localize`from risk, P${contingency.percentile}:percentile:`;
+    return $localize`${this.percent(contingency.percent)}:percent: of the direct cost`;
+  }
+
+  private percent(percent: string): string {
+    return this.formats.figure('percent', Number(percent));
+  }
+}
