@@ -1,6 +1,6 @@
 import { createHash, randomUUID } from 'node:crypto';
-import { mkdir, open, readdir, readFile, rename, rm, stat } from 'node:fs/promises';
-import { dirname, join } from 'node:path';
+import { mkdir, open, readdir, readFile, rename, rm, stat, utimes } from 'node:fs/promises';
+import { basename, dirname, join } from 'node:path';
 import { v7 as newId } from 'uuid';
 import { Rejection } from '#shared/problems/rejection';
 import type { Clock } from '../clock/clock';
@@ -44,11 +44,6 @@ async function syncFolder(path: string): Promise<void> {
   await folder.sync().finally(() => folder.close());
 }
 
-const isThere = (path: string): Promise<boolean> =>
-  stat(path).then(
-    () => true,
-    () => false,
-  );
 const names = (folder: string): Promise<string[]> => readdir(folder).catch(() => []);
 
 /**
@@ -110,9 +105,8 @@ export class FileStore {
     let swept = 0;
     for (const workshopId of await names(this.folder)) {
       for (const shelf of await names(join(this.folder, workshopId))) {
-        for (const name of await names(join(this.folder, workshopId, shelf))) {
-          swept += (await this.sweepOne(workshopId, name)) ? 1 : 0;
-        }
+        const folder = join(this.folder, workshopId, shelf);
+        for (const name of await names(folder)) swept += (await this.sweepOne(workshopId, join(folder, name))) ? 1 : 0;
       }
     }
     return swept;
@@ -122,21 +116,34 @@ export class FileStore {
     return join(this.folder, workshopId, sha256.slice(0, 2), sha256);
   }
 
+  /** Bytes that lie there already are made young again, so that no sweep takes them before their new row is committed. */
   private async keep(path: string, bytes: Buffer): Promise<void> {
-    if (await isThere(path)) return;
+    const now = this.clock.now();
+    if (
+      await utimes(path, now, now).then(
+        () => true,
+        () => false,
+      )
+    )
+      return;
     const folder = dirname(path);
     await mkdir(folder, { recursive: true, mode: 0o700 });
     const making = join(folder, `${randomUUID()}.making`);
     await writeThrough(making, bytes);
+    await utimes(making, now, now);
     await rename(making, path);
     await syncFolder(folder);
   }
 
-  private async sweepOne(workshopId: string, name: string): Promise<boolean> {
-    const path = join(this.folder, workshopId, name.slice(0, 2), name);
+  private async isOld(path: string): Promise<boolean> {
     const found = await stat(path).catch(() => undefined);
-    if (!found || this.clock.now().getTime() - found.mtimeMs < orphanAge_milliseconds) return false;
-    if ((await this.rows.list(workshopId, { where: { sha256: name }, limit: 1 })).length > 0) return false;
+    return found !== undefined && this.clock.now().getTime() - found.mtimeMs >= orphanAge_milliseconds;
+  }
+
+  private async sweepOne(workshopId: string, path: string): Promise<boolean> {
+    if (!(await this.isOld(path))) return false;
+    const named = await this.rows.list(workshopId, { where: { sha256: basename(path) }, limit: 1 });
+    if (named.length > 0 || !(await this.isOld(path))) return false;
     await rm(path, { force: true });
     return true;
   }
