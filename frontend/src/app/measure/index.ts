@@ -1,5 +1,8 @@
-export { ShapeCards } from './shape-cards';
-export { ShapeGlyph } from './shape-glyph';
 export { elementName } from './element-names';
+export { MemberPicture } from './member-picture';
+export { PartPicker } from './part-picker';
 export { finishNames, reliefNames } from './relief-names';
+export { ShapeCards } from './shape-cards';
+export { ShapeForm } from './shape-form';
+export { ShapeGlyph } from './shape-glyph';
 export { shapeNames } from './shape-names';

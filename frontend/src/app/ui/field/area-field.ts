@@ -1,12 +1,13 @@
-import { ChangeDetectionStrategy, Component, computed } from '@angular/core';
+import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { NG_VALUE_ACCESSOR } from '@angular/forms';
-import { squareMillimetresPerSquareInch } from '#shared/units/exact-factors';
-import { parseNumber } from '#shared/units/parse-number';
+import { decimalSign } from '#shared/units/decimal-sign';
+import { parseArea } from '#shared/units/parse-area';
+import type { AreaEntry } from '../../core/forms/typed-measure';
 import { Entry } from './entry';
 import { Field } from './field';
 import { TypedEntry, type ReadEntry } from './typed-entry';
 
-/** An area typed in square centimetres, or square inches where the workshop measures in inches; the form holds square millimetres. */
+/** An area with its unit as one likes, 0.12 m² or 1200 cm²; the form holds text and square millimetres. */
 @Component({
   selector: 'app-area-field',
   imports: [Entry, Field],
@@ -14,22 +15,21 @@ import { TypedEntry, type ReadEntry } from './typed-entry';
   templateUrl: './typed-entry.html',
   providers: [{ provide: NG_VALUE_ACCESSOR, useExisting: AreaField, multi: true }],
 })
-export class AreaField extends TypedEntry<number> {
-  private readonly isMetric = computed(() => this.formats.lengthUnit() === 'mm');
-  private readonly unit_mm2 = computed(() => (this.isMetric() ? 100 : squareMillimetresPerSquareInch));
+export class AreaField extends TypedEntry<AreaEntry> {
+  /** The unit is part of what is typed. */
+  readonly unitText = (): string => '';
 
-  readonly unitText = (): string => (this.isMetric() ? 'cm²' : 'in²');
-
-  protected override read(text: string): ReadEntry<number> {
-    const parsed = parseNumber(text, this.formats.locale());
-    return parsed.ok ? { ok: true, value: parsed.value * this.unit_mm2() } : parsed;
+  protected override read(text: string): ReadEntry<AreaEntry> {
+    const unit = this.formats.lengthUnit();
+    const parsed = parseArea(text, { unit, decimalSign: decimalSign(this.formats.locale()) });
+    return parsed.ok ? { ok: true, value: { text, mm2: parsed.mm2 } } : parsed;
   }
 
-  protected override write(value: number): string {
-    return this.formats.typed(Number((value / this.unit_mm2()).toPrecision(12)));
+  protected override write(value: AreaEntry): string {
+    return value.text;
   }
 
-  protected override unreadable(): number {
-    return Number.NaN;
+  protected override unreadable(text: string): AreaEntry {
+    return { text, mm2: Number.NaN };
   }
 }

@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, booleanAttribute, computed, input, signal } from '@angular/core';
 import { NG_VALUE_ACCESSOR } from '@angular/forms';
 import { decimalSign } from '#shared/units/decimal-sign';
 import { parseLength } from '#shared/units/parse-length';
@@ -21,6 +21,8 @@ export interface TypedLength {
   providers: [{ provide: NG_VALUE_ACCESSOR, useExisting: LengthField, multi: true }],
 })
 export class LengthField extends TypedEntry<TypedLength> {
+  /** A displacement, which may be negative. */
+  readonly signed = input(false, { transform: booleanAttribute });
   private readonly known_mm = signal<number | undefined>(undefined);
 
   readonly unitText = computed(() => this.formats.lengthUnit());
@@ -35,12 +37,14 @@ export class LengthField extends TypedEntry<TypedLength> {
   }
 
   protected override read(text: string): ReadEntry<TypedLength> {
-    const parsed = parseLength(text, {
+    const minus = this.signed() ? (/^\s*[-−]\s*/.exec(text)?.[0] ?? '') : '';
+    const parsed = parseLength(text.slice(minus.length), {
       unit: this.formats.lengthUnit(),
       decimalSign: decimalSign(this.formats.locale()),
     });
-    this.known_mm.set(parsed.ok ? parsed.mm : undefined);
-    return parsed.ok ? { ok: true, value: { text, mm: parsed.mm } } : parsed;
+    const length_mm = parsed.ok ? (minus ? 0 - parsed.mm : parsed.mm) : undefined;
+    this.known_mm.set(length_mm);
+    return parsed.ok ? { ok: true, value: { text, mm: length_mm ?? 0 } } : parsed;
   }
 
   protected override write(value: TypedLength): string {

@@ -1,0 +1,91 @@
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import type { Zone } from '#shared/estimates/member';
+import type { ProfileElement } from '#shared/measure/profile-element';
+import { reliefs } from '#shared/measure/relief';
+import { Formats } from '../../core/formats/formats';
+import { newId } from '../../core/new-id';
+import { PartPicker, reliefNames } from '../../measure';
+import { EntryAt } from '../../ui/field/entry-at';
+import type { Explained } from '../../ui/figure/explained';
+import { Figure } from '../../ui/figure/figure';
+import { Icon } from '../../ui/icon/icon';
+import { EstimateStore } from '../estimate-store';
+import type { MemberForm } from '../members/member-form';
+import { MemberSelection } from '../members/member-selection';
+import { newZone } from './new-zone';
+
+/** The zones of a member: what of its surface each takes, and how deep its relief is. What is laid on it is chosen in Gild. */
+@Component({
+  selector: 'app-zone-list',
+  imports: [EntryAt, Figure, Icon, MatButton, PartPicker],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './zone-list.html',
+  styleUrl: './item-list.scss',
+})
+export class ZoneList {
+  private readonly store = inject(EstimateStore);
+  private readonly selection = inject(MemberSelection);
+  private readonly formats = inject(Formats);
+
+  readonly form = input.required<MemberForm>();
+  readonly isDisabled = input(false);
+
+  protected readonly reliefs = reliefs.map((value) => ({ value, label: reliefNames[value] }));
+  private readonly figures = computed(() =>
+    this.store.figures()?.members.find(({ memberId }) => memberId === this.selection.member()?.id),
+  );
+  /** The girth’s parts, of which a zone may take some by themselves. */
+  protected readonly parts = computed(() => this.figures()?.parts ?? []);
+  /** The profile as it was last possible. */
+  protected readonly profile = computed<readonly ProfileElement[]>(() => {
+    const shape = this.selection.member()?.shape;
+    return shape && 'profile' in shape ? shape.profile : [];
+  });
+  protected readonly zones = computed(() => {
+    const zones = this.form().value<readonly Zone[]>('zones') ?? [];
+    return this.form()
+      .items('zones')
+      .map((control, index) => ({
+        control,
+        path: `zones.${index}`,
+        zone: zones[index],
+        worked: this.worked(zones[index]),
+      }));
+  });
+
+  protected takenBeside(index: number): readonly string[] {
+    return this.zones().flatMap(({ zone }, other) =>
+      other !== index && zone.take.way === 'parts' ? zone.take.parts : [],
+    );
+  }
+
+  protected add(): void {
+    const zones = this.zones().map(({ zone }) => zone);
+    const start = {
+      id: newId(),
+      name: zones.length === 0 ? $localize`All of it` : $localize`Zone ${zones.length + 1}:number:`,
+    };
+    this.form().insert('zones', zones.length, newZone(start, zones, this.store.card()));
+  }
+
+  protected remove(index: number): void {
+    this.form().remove('zones', index);
+  }
+
+  protected takeBy(path: string, way: 'share' | 'parts'): void {
+    const take = way === 'share' ? { way, share_percent: 100 } : { way, parts: [] };
+    this.form().put(`${path}.take`, take);
+  }
+
+  protected takeParts(path: string, parts: readonly string[]): void {
+    this.form().put(`${path}.take`, { way: 'parts', parts });
+  }
+
+  private worked(zone: Zone | undefined): { text: string; explained: Explained } | undefined {
+    const figures = this.store.figures()?.zones.find(({ zoneId }) => zoneId === zone?.id);
+    if (!figures) return undefined;
+    const text = this.formats.area(figures.true_mm2);
+    return { text, explained: { id: `zone ${figures.zoneId}`, heading: text, reasons: figures.reasons } };
+  }
+}

@@ -1,0 +1,65 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import type { DrawingView } from '#shared/measure/drawing/drawing';
+import { memberDrawing } from '#shared/measure/drawing/member-drawing';
+import type { Shape } from '#shared/measure/shape';
+import { ScaleDrawing } from '../ui/drawing/scale-drawing';
+
+const viewNames: Readonly<Record<DrawingView['view'], string>> = {
+  face: $localize`Face`,
+  profile: $localize`Section`,
+  plan: $localize`Plan`,
+  elevation: $localize`Elevation`,
+  unrolled: $localize`Unrolled`,
+};
+
+/** A member drawn to scale from the numbers its surface is worked from, view by view, each with its dimensions. */
+@Component({
+  selector: 'app-member-picture',
+  imports: [ScaleDrawing],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    @for (view of views(); track view.view) {
+      <figure [class.slim]="view.isSlim">
+        <figcaption class="muted">{{ view.name }}</figcaption>
+        <app-scale-drawing [view]="view.drawn" [label]="name() + ', ' + view.name" [most_px]="most_px()" />
+      </figure>
+    } @empty {
+      <p class="muted" i18n>A measured area is given as a figure; there is nothing to draw.</p>
+    }
+  `,
+  styles: `
+    :host {
+      display: flex;
+      flex-wrap: wrap;
+      gap: 16px 32px;
+    }
+
+    figure {
+      flex: 1 1 320px;
+      min-width: 0;
+      margin: 0;
+    }
+
+    .slim {
+      flex: 0 1 220px;
+    }
+
+    figcaption {
+      font-size: 0.9375rem;
+    }
+  `,
+})
+export class MemberPicture {
+  readonly shape = input.required<Shape>();
+  readonly name = input.required<string>();
+  readonly most_px = input(300);
+
+  protected readonly views = computed(() =>
+    memberDrawing(this.shape()).views.map((drawn) => ({
+      drawn,
+      view: drawn.view,
+      name: viewNames[drawn.view],
+      isSlim: drawn.box.height_mm > 1.5 * drawn.box.width_mm,
+    })),
+  );
+}

@@ -1,0 +1,81 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import type { MouldingPlan, PolygonPlan } from '#shared/measure/moulding-shape';
+import type { AnyDocumentForm } from '../core/forms/document-form';
+import { EntryAt } from '../ui/field/entry-at';
+import { ChoiceEntry } from './choice-entry';
+import { RowsEditor } from './rows-editor';
+import type { ShapeEntry } from './shape-entries';
+
+type PlanForm = MouldingPlan['form'];
+
+const sideLength: ShapeEntry = { path: '', label: $localize`Length`, way: 'length' };
+const turn: ShapeEntry = { path: '', label: $localize`Turn`, way: 'number', unit: '°' };
+
+const starts: Readonly<Record<PlanForm, (sides_mm: readonly number[]) => MouldingPlan>> = {
+  straight: (sides_mm) => ({ form: 'straight', sides_mm, returns_mm: [] }),
+  arc: () => ({ form: 'arc', radius_mm: 600, angle_degrees: 90 }),
+  ellipse: () => ({ form: 'ellipse', length_mm: 800, width_mm: 500 }),
+  polygon: () => ({ form: 'polygon', sides_mm: [800, 400, 800, 400], turns_degrees: [90, 90, 90, 90], closed: true }),
+};
+
+/** The plan a moulding runs along: straight lengths with returns, a sweep, an oval, or sides that meet in mitres. */
+@Component({
+  selector: 'app-plan-editor',
+  imports: [ChoiceEntry, EntryAt, RowsEditor],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './plan-editor.html',
+})
+export class PlanEditor {
+  readonly form = input.required<AnyDocumentForm>();
+  /** Where the moulding stands in the document. */
+  readonly path = input.required<string>();
+  readonly isDisabled = input(false);
+
+  protected readonly plan = computed(() => this.form().value<MouldingPlan>(`${this.path()}.plan`));
+  protected readonly complaint = computed(() => this.form().message(`${this.path()}.plan`));
+  protected readonly forms = [
+    { value: 'straight', label: $localize`straight lengths, with returns` },
+    { value: 'polygon', label: $localize`sides meeting in mitres` },
+    { value: 'arc', label: $localize`a sweep` },
+    { value: 'ellipse', label: $localize`an oval` },
+  ];
+  protected readonly edges = [
+    { value: 'back', label: $localize`its least projection` },
+    { value: 'front', label: $localize`its greatest projection` },
+  ];
+  protected readonly facings = [
+    { value: 'outward', label: $localize`round the outside` },
+    { value: 'inward', label: $localize`round the inside` },
+  ];
+  protected readonly lengthHeading = [$localize`Length`];
+  protected readonly turnHeading = [$localize`Turn`];
+  protected readonly lengthCells = () => [sideLength];
+  protected readonly turnCells = () => [turn];
+
+  protected at(name: string): string {
+    return `${this.path()}.plan.${name}`;
+  }
+
+  protected change(form: string): void {
+    const before = this.plan();
+    const sides_mm = before && 'sides_mm' in before ? before.sides_mm : [1000];
+    this.form().put(`${this.path()}.plan`, starts[form as PlanForm](sides_mm));
+  }
+
+  protected addSide(index: number): void {
+    this.form().insert(this.at('sides_mm'), index, this.form().value<number>(this.at(`sides_mm.${index - 1}`)) ?? 500);
+    if (this.plan()?.form === 'polygon') this.form().insert(this.at('turns_degrees'), this.turns(), 90);
+  }
+
+  protected addReturn(index: number): void {
+    this.form().insert(this.at('returns_mm'), index, 100);
+  }
+
+  protected addTurn(index: number): void {
+    this.form().insert(this.at('turns_degrees'), index, 90);
+  }
+
+  private turns(): number {
+    return (this.plan() as PolygonPlan).turns_degrees.length;
+  }
+}
