@@ -27,7 +27,7 @@ export class CardEffectsRepository extends WorkshopRows<CardEffectsRow> {
   /** Writes what one asking has come to, unless another came after it. */
   async writeRun(workshopId: string, { rateCardId, runId }: EffectsRun, change: Change): Promise<boolean> {
     const where = { workshopId, id: rateCardId, runId } as WhereOptions<CardEffectsRow>;
-    const [changed] = await this.table.update(change as never, { where });
+    const [changed] = await this.table.update(change, { where });
     return changed > 0;
   }
 

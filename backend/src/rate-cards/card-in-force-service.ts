@@ -33,7 +33,10 @@ export class CardInForceService {
     if (from < (await this.parts.today(actor.workshopId))) throw ofDay('invalid', 'rate-card-day-past');
     const other = await cards.headFrom(actor.workshopId, from);
     if (other) throw ofDay('conflict', 'rate-card-day-taken', { name: other.name });
-    const dated = await cards.change(actor.workshopId, card, { inForceFrom: from, changedAt: this.parts.clock.now() });
+    const dated = await cards.changeHead(actor.workshopId, card, {
+      inForceFrom: from,
+      changedAt: this.parts.clock.now(),
+    });
     await history.record(actor, dated, { code: 'history-rate-card-in-force', values: { day: from } });
     return dated;
   }
@@ -46,7 +49,10 @@ export class CardInForceService {
     if (card.inForceFrom <= (await this.parts.today(actor.workshopId)))
       throw new Rejection('conflict', 'rate-card-begun');
     refuseStale(card, seen.version);
-    const draft = await cards.change(actor.workshopId, card, { inForceFrom: null, changedAt: this.parts.clock.now() });
+    const draft = await cards.changeHead(actor.workshopId, card, {
+      inForceFrom: null,
+      changedAt: this.parts.clock.now(),
+    });
     await history.record(actor, draft, { code: 'history-rate-card-taken-back' });
     return draft;
   }

@@ -82,7 +82,7 @@ export class DraftCardService {
   }
 
   private change({ workshopId }: Actor, before: RateCardRow, { name, content }: CardEntry): Promise<RateCardRow> {
-    return this.parts.cards.change(workshopId, before, { name, content, changedAt: this.parts.clock.now() });
+    return this.parts.cards.changeHead(workshopId, before, { name, content, changedAt: this.parts.clock.now() });
   }
 
   private async baseOf({ workshopId, basedOnId, content }: RateCardRow): Promise<RateCard> {

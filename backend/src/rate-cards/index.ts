@@ -15,6 +15,7 @@ import { RateCardService } from './rate-card-service';
 
 export type { CardEffects, TellProgress } from './card-effects-service';
 export type { CardInForceService } from './card-in-force-service';
+export type { CardWorkbookService } from './card-workbook-service';
 export type { DraftCardService } from './draft-card-service';
 export type { RateCardRow } from './rate-card-model';
 export type { RateCardService } from './rate-card-service';
@@ -24,6 +25,7 @@ export interface RateCards {
   readonly service: RateCardService;
   readonly drafts: DraftCardService;
   readonly inForce: CardInForceService;
+  readonly workbooks: CardWorkbookService;
   readonly routes: readonly Route[];
 }
 
@@ -48,5 +50,5 @@ export function openRateCards(platform: Platform, { accounts, audit, effects: wo
   });
   const workbooks = new CardWorkbookService({ cards, drafts, workshops: accounts.workshops });
   const routes = [...rateCardRoutes({ cards: service, drafts, inForce, workbooks }), ...cardEffectsRoutes(effects)];
-  return { service, drafts, inForce, routes };
+  return { service, drafts, inForce, workbooks, routes };
 }

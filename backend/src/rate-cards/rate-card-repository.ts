@@ -56,6 +56,15 @@ export class RateCardRepository extends WorkshopRows<RateCardRow> {
     return { items, next, count: Math.min(count, countLimit), countIsExact: count <= countLimit };
   }
 
+  /** Changes a card that still is as it was read; its content takes no part in finding it. */
+  changeHead(
+    workshopId: string,
+    { id, version }: RateCardHead,
+    change: Partial<Pick<RateCardRow, 'name' | 'content' | 'inForceFrom' | 'changedAt'>>,
+  ): Promise<RateCardRow> {
+    return this.change(workshopId, { id, version }, change);
+  }
+
   private async heads(
     workshopId: string,
     where: WhereOptions<RateCardRow>,

@@ -2,6 +2,7 @@ import type { MatrixRows } from '../matrix-row';
 import { accountsRows } from './accounts-rows';
 import { estimatesRows } from './estimates-rows';
 import { jobsRows } from './jobs-rows';
+import { rateCardsRows } from './rate-cards-rows';
 
 /** The rows of every feature. */
-export const allRows: MatrixRows = { ...accountsRows, ...jobsRows, ...estimatesRows };
+export const allRows: MatrixRows = { ...accountsRows, ...rateCardsRows, ...jobsRows, ...estimatesRows };

@@ -1,6 +1,5 @@
 import type { CardColumn, CardForm, CardGrid, CardList, CardTable } from '#shared/rate-cards/tables/card-table';
 import { fieldsOf, formCellPath, gridCellPath, listCellPath, type CellPath } from '#shared/rate-cards/tables/cell-path';
-import { words } from '../../platform/http/words';
 import type { CardBuilding, SheetPlace } from './card-building';
 import type { FoundSheet } from './read-sheets';
 import { fromSheetCell } from './sheet-cell';

@@ -58,7 +58,7 @@ export function toSheetCell(column: CardColumn, value: unknown): WrittenCell {
 function plain(value: CellValue): CellValue {
   if (typeof value !== 'object' || value === null || value instanceof Date) return value;
   if ('richText' in value) return value.richText.map(({ text }) => text).join('');
-  return 'hyperlink' in value ? plain(value.text as CellValue) : value;
+  return 'hyperlink' in value ? plain(value.text) : value;
 }
 
 function refusalOf(value: CellValue): WordCode | undefined {
