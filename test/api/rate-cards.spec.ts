@@ -20,7 +20,7 @@ import {
 } from '#shared/rate-cards/rate-cards-endpoints';
 import type { RateCardSummary } from '#shared/rate-cards/rate-card-summary-schema';
 import { startCard } from '#shared/rate-cards/start-card';
-import { withValueAt } from '#shared/rate-cards/tables/cell-value';
+import { withValueAt } from '#shared/rate-cards/tables/value-at';
 import { cardInForce, dayAhead, draftCard, wholeCard } from './sample-card';
 import { sampleEstimate } from './sample-estimate';
 import { startApi, type Api } from './start-api';

@@ -1,6 +1,6 @@
 import { systems } from '#shared/buildups/buildup';
 import { finishes } from '#shared/measure/relief';
-import { choicesOf } from '#shared/rate-cards/tables/card-choices';
+import { choicesOf } from '#shared/rate-cards/tables/choices-of';
 import type { CardPart } from '#shared/rate-cards/tables/card-table';
 import { choiceColumn, nameColumn, noteColumn, numberColumn } from '#shared/rate-cards/tables/columns';
 import { lagColumns, stepColumns, useColumns } from '#shared/rate-cards/tables/step-columns';

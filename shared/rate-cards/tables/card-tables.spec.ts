@@ -2,7 +2,7 @@ import { cellAt } from '#shared/rate-cards/tables/cell-at';
 import { cardTables } from '#shared/rate-cards/tables/card-parts';
 import type { CardTable } from '#shared/rate-cards/tables/card-table';
 import { formCellPath, gridCellPath, listCellPath, type CellPath } from '#shared/rate-cards/tables/cell-path';
-import { valueAt, withValueAt } from '#shared/rate-cards/tables/cell-value';
+import { valueAt, withValueAt } from '#shared/rate-cards/tables/value-at';
 import { listRows } from '#shared/rate-cards/tables/list-rows';
 import { startCard } from '#shared/rate-cards/start-card';
 

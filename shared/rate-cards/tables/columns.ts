@@ -27,8 +27,10 @@ export const decimalColumn = (field: string, heading: Heading, more: More = {}):
 export const hundredthsColumn = (field: string, heading: Heading): CardColumn =>
   column(field, heading, { kind: 'hundredths', unit: 'percent' });
 
+/** Text of one line. */
 export const textColumn = (field: string, heading: Heading): CardColumn => column(field, heading, { kind: 'text' });
 
+/** Yes or no. */
 export const yesNoColumn = (field: string, heading: Heading): CardColumn => column(field, heading, { kind: 'yes-no' });
 
 /** One of a set, or several of it. */
@@ -54,4 +56,5 @@ export const itemColumn = (
 
 export const nameColumn = textColumn('name', 'name');
 export const noteColumn = textColumn('note', 'note');
+/** A grade of labour of the card. */
 export const gradeColumn = (field = 'gradeId'): CardColumn => itemColumn(field, 'grade', { items: 'grade' });

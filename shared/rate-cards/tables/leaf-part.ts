@@ -1,6 +1,6 @@
 import { leafCharges } from '#shared/leaf/leaf-card';
 import { alloyMetals, leafForms, leafMetals } from '#shared/leaf/leaf-product';
-import { choicesOf } from '#shared/rate-cards/tables/card-choices';
+import { choicesOf } from '#shared/rate-cards/tables/choices-of';
 import type { CardPart } from '#shared/rate-cards/tables/card-table';
 import { choiceColumn, decimalColumn, nameColumn, numberColumn } from '#shared/rate-cards/tables/columns';
 

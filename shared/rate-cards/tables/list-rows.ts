@@ -1,6 +1,6 @@
 import type { CardList } from '#shared/rate-cards/tables/card-table';
 import { fieldsOf, type CellPath } from '#shared/rate-cards/tables/cell-path';
-import { valueAt } from '#shared/rate-cards/tables/cell-value';
+import { valueAt } from '#shared/rate-cards/tables/value-at';
 
 /** A row of a list: the way to it, and the ids of the items it stands in, its own last where it has one. */
 export interface ListRow {

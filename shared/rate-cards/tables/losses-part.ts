@@ -1,5 +1,5 @@
 import { leafFinishes, layingWays } from '#shared/leaf/leaf-card';
-import { choicesOf } from '#shared/rate-cards/tables/card-choices';
+import { choicesOf } from '#shared/rate-cards/tables/choices-of';
 import type { CardPart, GridRow } from '#shared/rate-cards/tables/card-table';
 import { numberColumn } from '#shared/rate-cards/tables/columns';
 

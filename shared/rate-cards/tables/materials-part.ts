@@ -1,4 +1,4 @@
-import { choicesOf } from '#shared/rate-cards/tables/card-choices';
+import { choicesOf } from '#shared/rate-cards/tables/choices-of';
 import type { CardPart } from '#shared/rate-cards/tables/card-table';
 import { choiceColumn, decimalColumn, itemColumn, nameColumn, numberColumn } from '#shared/rate-cards/tables/columns';
 

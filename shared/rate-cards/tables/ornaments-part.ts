@@ -1,7 +1,7 @@
 import { learningModels } from '#shared/carving/carving-card';
 import { carvingItemKinds, ornamentWays } from '#shared/carving/ornament';
 import { reliefs } from '#shared/measure/relief';
-import { choicesOf } from '#shared/rate-cards/tables/card-choices';
+import { choicesOf } from '#shared/rate-cards/tables/choices-of';
 import type { CardPart } from '#shared/rate-cards/tables/card-table';
 import {
   choiceColumn,

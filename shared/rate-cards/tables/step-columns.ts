@@ -6,7 +6,7 @@ import {
   missedWindows,
   stepKinds,
 } from '#shared/buildups/buildup';
-import { choicesOf } from '#shared/rate-cards/tables/card-choices';
+import { choicesOf } from '#shared/rate-cards/tables/choices-of';
 import type { CardColumn } from '#shared/rate-cards/tables/card-table';
 import {
   choiceColumn,

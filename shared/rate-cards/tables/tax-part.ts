@@ -1,5 +1,5 @@
 import { taxCodes } from '#shared/rate-cards/money-card';
-import { choicesOf } from '#shared/rate-cards/tables/card-choices';
+import { choicesOf } from '#shared/rate-cards/tables/choices-of';
 import type { CardPart } from '#shared/rate-cards/tables/card-table';
 import { choiceColumn, decimalColumn, itemColumn, nameColumn, textColumn } from '#shared/rate-cards/tables/columns';
 

@@ -1,7 +1,7 @@
 import { recuttingManners } from '#shared/carving/carving-card';
 import { planCurves } from '#shared/carving/plan-curve';
 import { reliefs } from '#shared/measure/relief';
-import { choicesOf } from '#shared/rate-cards/tables/card-choices';
+import { choicesOf } from '#shared/rate-cards/tables/choices-of';
 import type { CardPart, GridRow } from '#shared/rate-cards/tables/card-table';
 import { decimalColumn, itemColumn, nameColumn, numberColumn } from '#shared/rate-cards/tables/columns';
 import type { WordCode } from '#shared/words/word-code';

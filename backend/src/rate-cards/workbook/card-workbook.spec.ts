@@ -4,7 +4,7 @@ import { problemStatus } from '#shared/problems/problem-schema';
 import { Rejection } from '#shared/problems/rejection';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { startCard } from '#shared/rate-cards/start-card';
-import { withValueAt } from '#shared/rate-cards/tables/cell-value';
+import { withValueAt } from '#shared/rate-cards/tables/value-at';
 import { readCardWorkbook } from './read-card-workbook';
 import { writeCardWorkbook } from './write-card-workbook';
 

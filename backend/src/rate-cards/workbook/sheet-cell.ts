@@ -1,6 +1,6 @@
 import Decimal from 'decimal.js';
 import type { CellValue } from 'exceljs';
-import { yesOrNoChoices } from '#shared/rate-cards/tables/card-choices';
+import { yesOrNoChoices } from '#shared/rate-cards/tables/choices-of';
 import type { CardChoice, CardColumn } from '#shared/rate-cards/tables/card-table';
 import type { WordCode } from '#shared/words/word-code';
 import { words } from '../../platform/http/words';

@@ -2,7 +2,7 @@ import { words } from '../../platform/http/words';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import type { CardForm, CardGrid, CardList, CardTable } from '#shared/rate-cards/tables/card-table';
 import { formCellPath, gridCellPath, listCellPath } from '#shared/rate-cards/tables/cell-path';
-import { valueAt } from '#shared/rate-cards/tables/cell-value';
+import { valueAt } from '#shared/rate-cards/tables/value-at';
 import { listRows } from '#shared/rate-cards/tables/list-rows';
 import { toSheetCell, type WrittenCell } from './sheet-cell';
 import { unitText } from './sheet-layout';

@@ -1,7 +1,7 @@
 import { Workbook, type Worksheet } from 'exceljs';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { cardTables } from '#shared/rate-cards/tables/card-parts';
-import { yesOrNoChoices } from '#shared/rate-cards/tables/card-choices';
+import { yesOrNoChoices } from '#shared/rate-cards/tables/choices-of';
 import type { CardColumn, CardTable } from '#shared/rate-cards/tables/card-table';
 import { words } from '../../platform/http/words';
 import { sheetLayout } from './sheet-layout';
