@@ -27,10 +27,10 @@ export const decimalColumn = (field: string, heading: Heading, more: More = {}):
 export const hundredthsColumn = (field: string, heading: Heading): CardColumn =>
   column(field, heading, { kind: 'hundredths', unit: 'percent' });
 
-/** Text of one line. */
+/** Text of one line, which may be left empty. */
 export const textColumn = (field: string, heading: Heading): CardColumn => column(field, heading, { kind: 'text' });
 
-/** Yes or no. */
+/** Yes or no, kept as true or false. */
 export const yesNoColumn = (field: string, heading: Heading): CardColumn => column(field, heading, { kind: 'yes-no' });
 
 /** One of a set, or several of it. */
