@@ -1,0 +1,12 @@
+export { BatchList } from './batch-list';
+export {
+  buildUpGroups,
+  type BuildUpGroup,
+  isBurnishedInPart,
+  protectsEdge,
+  takesLeaf,
+  takesPaintedOrnament,
+  takesRecutting,
+} from './build-up-names';
+export { StepChoice } from './step-choice';
+export { stripLayers } from './strip-layers';

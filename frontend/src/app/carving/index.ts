@@ -1,0 +1,10 @@
+export { extentOf, fittingExtent } from './fitting-extent';
+export { HoursTable } from './hours-table';
+export { type CatalogueEntry, foundEntries, ornamentCatalogue } from './ornament-catalogue';
+export { OrnamentForm } from './ornament-form';
+export { planNames } from './plan-names';
+export { RunDrawing } from './run-drawing';
+export { type RunItem, runItems } from './run-items';
+export { runPath } from './run-path';
+export { RunWords } from './run-words';
+export { gradeHours, type Named, type NamedHours, stageHours } from './stage-hours';

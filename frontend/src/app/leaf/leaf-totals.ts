@@ -1,0 +1,122 @@
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import type { LeafCoverage } from '#shared/leaf/leaf-coverage';
+import type { LeafPurchase } from '#shared/leaf/leaf-purchase';
+import type { Triple } from '#shared/units/triple';
+import type { Reason } from '#shared/words/reason';
+import { Formats } from '../core/formats/formats';
+import type { Explained } from '../ui/figure/explained';
+import type { FigureColumn } from '../ui/table/figure-column';
+import { FigureTable } from '../ui/table/figure-table';
+
+/** All leaf of one product; what is bought and what it costs only where the reader may know. */
+export interface LeafOfProduct {
+  readonly productId: string;
+  readonly name: string;
+  readonly netLeaves: number;
+  readonly grossLeaves: Triple;
+  readonly grossLeaves_p10: number;
+  readonly grossLeaves_p90: number;
+  readonly booklets: number;
+  readonly coverage: LeafCoverage;
+  readonly mass_grams: number;
+  readonly reasons: readonly Reason[];
+  readonly purchase: LeafPurchase | null;
+  readonly cost_minor: number | null;
+}
+
+type Column = FigureColumn<LeafOfProduct>;
+
+/** The leaf of a whole estimate, product by product: leaves, booklets, packs, how it covers, how much metal it is. */
+@Component({
+  selector: 'app-leaf-totals',
+  imports: [FigureTable],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    <app-figure-table
+      captionShown
+      i18n-caption
+      caption="Leaf of the whole job"
+      [columns]="columns()"
+      [rows]="products()"
+      [rowId]="idOf"
+    />
+  `,
+})
+export class LeafTotals {
+  private readonly formats = inject(Formats);
+
+  readonly products = input.required<readonly LeafOfProduct[]>();
+
+  protected readonly idOf = (product: LeafOfProduct) => product.productId;
+  protected readonly columns = computed<readonly Column[]>(() => [
+    { key: 'name', heading: $localize`Leaf`, kind: 'text', text: ({ name }) => name, minor: (row) => this.bought(row) },
+    {
+      key: 'leaves',
+      heading: $localize`Leaves`,
+      kind: 'figure',
+      text: ({ grossLeaves }) => this.formats.number(grossLeaves.likely, 1, 1),
+      minor: (row) => this.range(row),
+      explained: (row) => this.explained(row),
+    },
+    {
+      key: 'booklets',
+      heading: $localize`Booklets`,
+      kind: 'figure',
+      text: ({ booklets }) => this.formats.number(booklets, 0),
+    },
+    ...this.coverage(),
+    ...this.cost(),
+  ]);
+
+  private coverage(): Column[] {
+    return [
+      {
+        key: 'gross',
+        heading: $localize`Leaf ÷ surface`,
+        kind: 'figure',
+        text: ({ coverage }) => this.formats.number(coverage.grossToNet, 2, 2),
+        minor: ({ coverage }) => $localize`${this.formats.number(coverage.loss_percent, 0)}:loss: % lost and lapped`,
+      },
+      {
+        key: 'each',
+        heading: $localize`Leaves per m²`,
+        kind: 'figure',
+        text: ({ coverage }) => this.formats.number(coverage.leavesPerM2, 0),
+        minor: ({ coverage }) => $localize`${this.formats.number(coverage.leavesPerFt2, 1)}:leaves: per ft²`,
+      },
+      {
+        key: 'metal',
+        heading: $localize`Metal`,
+        kind: 'figure',
+        text: ({ mass_grams }) => this.formats.figure('grams', mass_grams),
+      },
+    ];
+  }
+
+  private cost(): Column[] {
+    if (!this.products().some(({ cost_minor }) => cost_minor !== null)) return [];
+    const text = ({ cost_minor }: LeafOfProduct) => (cost_minor === null ? '' : this.formats.money(cost_minor));
+    return [{ key: 'cost', heading: $localize`Cost`, kind: 'figure', text }];
+  }
+
+  private range({ grossLeaves_p10, grossLeaves_p90 }: LeafOfProduct): string {
+    const [low, high] = [grossLeaves_p10, grossLeaves_p90].map((leaves) => this.formats.number(leaves, 0));
+    return $localize`${low}:low: to ${high}:high:`;
+  }
+
+  /** “1 pack of 20, 16 single booklets”. */
+  private bought({ purchase }: LeafOfProduct): string {
+    if (!purchase) return '';
+    const packs = purchase.packs.map(({ booklets, count }) =>
+      count === 1
+        ? $localize`a pack of ${booklets}:booklets:`
+        : $localize`${count}:count: packs of ${booklets}:booklets:`,
+    );
+    const singles = purchase.singles > 0 ? [$localize`${purchase.singles}:booklets: single`] : [];
+    return [...packs, ...singles].join(', ');
+  }
+
+  private explained({ productId, grossLeaves, reasons }: LeafOfProduct): Explained {
+    return { id: `leaf ${productId}`, heading: this.formats.figure('leaves', grossLeaves.likely), reasons };
+  }
+}
