@@ -35,12 +35,10 @@ export const identifier = z.uuid().regex(/^[0-9a-f-]{36}$/);
 /** An e-mail address in small letters, at most 254 characters (RFC 5321). */
 export const emailAddress = z.string().trim().toLowerCase().max(254).pipe(z.email());
 
+const isWebAddress = (text: string): boolean => /^(https?:\/\/[^\s/?#@]+|mailto:[^\s@]+@[^\s@]+)[^\s]*$/i.test(text);
+
 /** An address a page may link to: http, https or mailto only. */
-export const webAddress = z
-  .string()
-  .trim()
-  .max(2_000)
-  .refine((text) => /^(https?:\/\/[^\s/?#@]+|mailto:[^\s@]+@[^\s@]+)[^\s]*$/i.test(text), complain('entry-not-link'));
+export const webAddress = z.string().trim().max(2_000).refine(isWebAddress, complain('entry-not-link'));
 
 /** An instant in UTC as ISO 8601 text. */
 export const instant = z.iso.datetime();
@@ -49,10 +47,19 @@ export const instant = z.iso.datetime();
 export const version = z.int().min(1);
 
 /** An e-mail address that may be left empty. */
-export const optionalEmailAddress = z.union([z.literal(''), emailAddress]);
+export const optionalEmailAddress = z
+  .string()
+  .trim()
+  .toLowerCase()
+  .max(254)
+  .refine((text) => text === '' || emailAddress.safeParse(text).success, complain('entry-not-email'));
 
 /** An address a page may link to, or nothing. */
-export const optionalWebAddress = z.union([z.literal(''), webAddress]);
+export const optionalWebAddress = z
+  .string()
+  .trim()
+  .max(2_000)
+  .refine((text) => text === '' || isWebAddress(text), complain('entry-not-link'));
 
 /** The version a change starts from; 0 where there was no row yet. */
 export const versionSeen = z.int().min(0);

@@ -49,7 +49,8 @@ export const appConfig = (catalogue: Catalogue): ApplicationConfig => ({
     provideAppInitializer(begin),
     { provide: CATALOGUE, useValue: catalogue },
     { provide: ErrorHandler, useClass: PageErrorHandler },
-    { provide: TitleStrategy, useClass: PageTitle },
+    PageTitle,
+    { provide: TitleStrategy, useExisting: PageTitle },
     { provide: SESSION_PORT, useExisting: AccountsSession },
   ],
 });

@@ -1,5 +1,6 @@
 import type { Routes } from '@angular/router';
 import { memberRoutes, strangerRoutes } from './accounts/accounts-routes';
+import { roleGuard } from './core/session/role-guard';
 import { signedInGuard } from './core/session/signed-in-guard';
 import { firstPlace } from './shell/first-place';
 
@@ -16,6 +17,12 @@ export const appRoutes: Routes = [
       {
         path: 'jobs/:jobId/estimates',
         loadChildren: () => import('./estimates/estimates-routes').then(({ estimatesRoutes }) => estimatesRoutes),
+      },
+      { path: 'jobs', loadChildren: () => import('./jobs/jobs-routes').then(({ jobsRoutes }) => jobsRoutes) },
+      {
+        path: 'clients',
+        canMatch: [roleGuard('owner', 'estimator', 'office')],
+        loadChildren: () => import('./jobs/jobs-routes').then(({ clientsRoutes }) => clientsRoutes),
       },
       {
         path: '**',

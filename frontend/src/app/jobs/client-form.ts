@@ -1,0 +1,76 @@
+import { ChangeDetectionStrategy, Component, computed, inject, input, type OnInit, output } from '@angular/core';
+import { ReactiveFormsModule } from '@angular/forms';
+import { MatButton } from '@angular/material/button';
+import {
+  clientContentSchema,
+  clientKinds,
+  clientSchema,
+  type Client,
+  type ClientContent,
+} from '#shared/jobs/client-schema';
+import { RowForm } from '../core/forms/row-form';
+import { holdWhileDirty } from '../core/forms/hold-while-dirty';
+import { newId } from '../core/new-id';
+import { Entry } from '../ui/field/entry';
+import { Field } from '../ui/field/field';
+import { FormComplaint } from '../ui/field/form-complaint';
+import { ClientCalls } from './client-calls';
+import { clientDifferences } from './client-differences';
+import { clientKindNames } from './client-kind-names';
+import { TwoSides } from './two-sides';
+
+const nothing: ClientContent = {
+  ...{ name: '', kind: 'person', contact: '', email: '', telephone: '', address: '' },
+  ...{ website: '', taxRegistration: '', note: '' },
+};
+
+/** Enters a client or changes one. */
+@Component({
+  selector: 'app-client-form',
+  imports: [Entry, Field, FormComplaint, MatButton, ReactiveFormsModule, TwoSides],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './client-form.html',
+})
+export class ClientForm implements OnInit {
+  private readonly calls = inject(ClientCalls);
+
+  /** The client to be changed; without one a new client is entered. */
+  readonly client = input<Client>();
+  readonly name = input('');
+  readonly kept = output<Client>();
+  readonly closed = output();
+
+  private readonly row = new RowForm(clientContentSchema, { row: clientSchema, begin: nothing, newId: newId() });
+  protected readonly form = this.row.form;
+  protected readonly kinds = clientKinds.map((kind) => ({ kind, name: clientKindNames[kind] }));
+  protected readonly differences = computed(() => clientDifferences(this.form.parsed(), this.row.meanwhile()));
+
+  constructor() {
+    holdWhileDirty(this.form);
+  }
+
+  ngOnInit(): void {
+    const client = this.client();
+    if (client) this.row.show(client);
+    else this.form.reset({ ...nothing, name: this.name() });
+  }
+
+  protected async send(): Promise<void> {
+    this.tell(await this.row.send((seen, content) => this.calls.keep(seen, content)));
+  }
+
+  protected async keepMine(): Promise<void> {
+    this.tell(await this.row.sendOver((seen, content) => this.calls.keep(seen, content)));
+  }
+
+  protected takeTheirs(): void {
+    const client = this.row.meanwhile();
+    if (!client) return;
+    this.row.show(client);
+    this.kept.emit(client);
+  }
+
+  private tell(client: Client | undefined): void {
+    if (client) this.kept.emit(client);
+  }
+}

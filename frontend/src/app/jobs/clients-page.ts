@@ -1,0 +1,39 @@
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import { Router, RouterLink } from '@angular/router';
+import type { Client } from '#shared/jobs/client-schema';
+import { PagedList } from '../core/lists/paged-list';
+import { SearchEntry } from '../ui/field/search-entry';
+import { EmptyState } from '../ui/page/empty-state';
+import { PageHeader } from '../ui/page/page-header';
+import { Skeleton } from '../ui/page/skeleton';
+import { ClientCalls, type ClientsAsked } from './client-calls';
+import { clientKindNames } from './client-kind-names';
+import { ListFoot } from './list-foot';
+import { RowSteps } from './row-steps';
+
+/** For whom the workshop works, by name. */
+@Component({
+  selector: 'app-clients-page',
+  imports: [EmptyState, ListFoot, MatButton, PageHeader, RouterLink, RowSteps, SearchEntry, Skeleton],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './clients-page.html',
+  styleUrl: './clients-page.scss',
+})
+export class ClientsPage {
+  private readonly calls = inject(ClientCalls);
+  private readonly router = inject(Router);
+
+  readonly search = input<string>();
+
+  private readonly asked = computed<ClientsAsked>(() => ({ search: this.search() ?? '' }));
+  protected readonly list = new PagedList<ClientsAsked, Client>(this.asked, (asked, cursor, signal) =>
+    this.calls.list(asked, cursor, signal),
+  );
+  protected readonly kindNames = clientKindNames;
+
+  protected look(search: string): void {
+    const queryParams = { search: search || null };
+    void this.router.navigate([], { queryParams, queryParamsHandling: 'merge', replaceUrl: true });
+  }
+}

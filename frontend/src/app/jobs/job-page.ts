@@ -1,0 +1,81 @@
+import { NgComponentOutlet } from '@angular/common';
+import { ChangeDetectionStrategy, Component, computed, effect, inject, input, resource, signal } from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import { Router, RouterLink } from '@angular/router';
+import type { Job } from '#shared/jobs/job-schema';
+import { Notices } from '../core/problems/notices';
+import { PageTitle } from '../core/routing/page-title';
+import { Session } from '../core/session/session';
+import { Confirm } from '../ui/dialog/confirm';
+import { EmptyState } from '../ui/page/empty-state';
+import { PageHeader } from '../ui/page/page-header';
+import { Skeleton } from '../ui/page/skeleton';
+import { JOB_ESTIMATES } from './job-estimates';
+import { JobForm } from './job-form';
+import { JobHistory } from './job-history';
+import { jobKindNames } from './job-kind-names';
+import { JobStateMark } from './job-state-mark';
+import { JobStore } from './job-store';
+
+/** One job: its estimates, what is known of it, and what was done. */
+@Component({
+  selector: 'app-job-page',
+  imports: [
+    ...[EmptyState, JobForm, JobHistory, JobStateMark, MatButton, NgComponentOutlet, PageHeader],
+    ...[RouterLink, Skeleton],
+  ],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  providers: [JobStore],
+  templateUrl: './job-page.html',
+  styleUrl: './job-page.scss',
+})
+export class JobPage {
+  protected readonly store = inject(JobStore);
+  private readonly session = inject(Session);
+  private readonly notices = inject(Notices);
+  private readonly confirm = inject(Confirm);
+  private readonly router = inject(Router);
+  private readonly title = inject(PageTitle, { optional: true });
+  private readonly loadEstimates = inject(JOB_ESTIMATES, { optional: true });
+
+  readonly jobId = input.required<string>();
+
+  protected readonly estimates = resource({ loader: async () => this.loadEstimates?.() });
+  protected readonly isChanging = signal(false);
+  protected readonly mayChange = computed(() => this.session.may('owner', 'estimator', 'office'));
+  protected readonly mayRemove = computed(() => this.session.may('owner', 'estimator'));
+  protected readonly kind = computed(() => jobKindNames[this.store.job()?.kind ?? 'new'].name);
+  protected readonly about = computed(() => {
+    const job = this.store.job();
+    return job ? `${job.number}, ${job.clientName}` : '';
+  });
+
+  constructor() {
+    effect(() => this.store.open(this.jobId()));
+    effect(() => {
+      const job = this.store.job();
+      if (job) this.title?.name(job.title);
+    });
+  }
+
+  protected keep(job: Job): void {
+    this.store.put(job);
+    this.isChanging.set(false);
+  }
+
+  protected async finish(job: Job): Promise<void> {
+    await this.store.finish(job, job.state !== 'finished');
+  }
+
+  protected async remove(job: Job): Promise<void> {
+    const isSure = await this.confirm.ask({
+      heading: $localize`Remove the job?`,
+      text: $localize`“${job.title}:title:” goes with all that was worked out for it, for good. Its number is not given again.`,
+      yes: $localize`Remove it`,
+    });
+    if (!isSure) return;
+    await this.store.remove(job);
+    this.notices.say($localize`Job ${job.number}:number: is removed.`);
+    await this.router.navigateByUrl('/jobs');
+  }
+}
