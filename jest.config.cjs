@@ -44,6 +44,7 @@ module.exports = {
     node('test/architecture'),
     node('test/benchmarks'),
     node('test/reference'),
+    node('test/start'),
     ...['api', 'repositories'].map((folder) => onDatabase(`test/${folder}`)),
   ],
 };

@@ -1,0 +1,75 @@
+/** Runs every check there is, one after the other, and ends with one plain line: how many passed, how many failed. */
+import { spawn } from 'node:child_process';
+import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync } from 'node:fs';
+import { dirname, join } from 'node:path';
+import { fileURLToPath } from 'node:url';
+
+const root = join(dirname(fileURLToPath(import.meta.url)), '..');
+const minute_milliseconds = 60_000;
+
+/** They open the built application, so they come after everything else. */
+const onTheBuiltApplication = ['test/start', 'test/journeys'];
+
+const say = (text) => console.log(`\n— ${text}`);
+
+/** Runs a program of Node's in its own process group and answers its exit code; ends the whole group when time is up. */
+function run(args, limit_minutes) {
+  return new Promise((resolve) => {
+    const child = spawn(process.execPath, args, { cwd: root, stdio: 'inherit', detached: true });
+    const late = setTimeout(() => {
+      say(`not done within ${limit_minutes} minutes`);
+      process.kill(-child.pid, 'SIGKILL');
+    }, limit_minutes * minute_milliseconds);
+    child.once('exit', (code) => {
+      clearTimeout(late);
+      resolve(code ?? 1);
+    });
+    child.once('error', () => resolve(1));
+  });
+}
+
+const npm = process.env.npm_execpath;
+
+async function check(script) {
+  say(script);
+  const args = npm ? [npm, 'run', '--silent', script] : ['--run', script];
+  return (await run(args, 10)) === 0 ? { passed: 1, failed: 0 } : { passed: 0, failed: 1 };
+}
+
+/** Counts what Jest reports; a file that does not run is a failure, and so is a test that was left out. */
+function countsOf(report, code) {
+  if (!existsSync(report)) return { passed: 0, failed: 1 };
+  const { numPassedTests, numFailedTests, numPendingTests, numTodoTests, numRuntimeErrorTestSuites } = JSON.parse(
+    readFileSync(report, 'utf8'),
+  );
+  const failed = numFailedTests + numPendingTests + numTodoTests + numRuntimeErrorTestSuites;
+  return { passed: numPassedTests, failed: failed === 0 && code !== 0 ? 1 : failed };
+}
+
+async function jest(name, args, limit_minutes) {
+  say(name);
+  const report = join(root, '.cache', `${name.replaceAll(' ', '-')}.json`);
+  mkdirSync(dirname(report), { recursive: true });
+  rmSync(report, { force: true });
+  const code = await run(['node_modules/jest/bin/jest.js', '--json', `--outputFile=${report}`, ...args], limit_minutes);
+  return countsOf(report, code);
+}
+
+const hasSpecs = (folder) =>
+  existsSync(join(root, folder)) &&
+  readdirSync(join(root, folder), { recursive: true }).some((name) => name.endsWith('.spec.ts'));
+
+async function runAll() {
+  const later = onTheBuiltApplication.filter(hasSpecs);
+  const results = [];
+  for (const script of ['check:types', 'check:lint', 'check:layers']) results.push(await check(script));
+  results.push(await jest('specifications', later.length > 0 ? ['--ignoreProjects', ...later] : [], 20));
+  if (later.length > 0)
+    results.push(await jest('the built application', ['--runInBand', '--selectProjects', ...later], 20));
+  return results;
+}
+
+const results = await runAll();
+const sum = (which) => results.reduce((total, result) => total + result[which], 0);
+console.log(`\n${sum('passed')} passed, ${sum('failed')} failed`);
+process.exit(sum('failed') > 0 ? 1 : 0);
