@@ -12,6 +12,8 @@ export interface FigureColumn<Row> {
   readonly explained?: (row: Row) => Explained | undefined;
   /** The cell may be typed into; the table hands the text out and keeps nothing. */
   readonly editable?: boolean;
+  /** What may be chosen instead of typed; the table hands out the words. */
+  readonly choices?: (row: Row) => readonly string[];
   /** What is wrong with a cell as it stands. */
   readonly remark?: (row: Row) => string;
 }

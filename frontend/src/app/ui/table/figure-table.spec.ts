@@ -144,3 +144,76 @@ describe('FigureTable', () => {
     expect(fixture.componentInstance.chosen()).toBe('a');
   });
 });
+
+@Component({
+  selector: 'app-test-ways',
+  imports: [FigureTable],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    <app-figure-table
+      i18n-caption
+      caption="Ways"
+      [columns]="columns"
+      [rows]="rows"
+      [rowId]="rowId"
+      (edited)="edits.push($event)"
+    />
+  `,
+})
+class TestWays {
+  readonly rows = [{ id: 'a', way: 'lays' }];
+  readonly columns: readonly FigureColumn<{ way: string }>[] = [
+    {
+      key: 'way',
+      heading: 'Way',
+      kind: 'text',
+      text: ({ way }) => way,
+      editable: true,
+      choices: () => ['sheets', 'lays', 'patches'],
+    },
+  ];
+  readonly rowId = ({ id }: { id: string }): string => id;
+  readonly edits: EditedCell[] = [];
+}
+
+describe('A cell with choices', () => {
+  let fixture: ComponentFixture<TestWays>;
+  const element = () => fixture.nativeElement as HTMLElement;
+  const chooser = () => element().querySelector('select');
+  const press = async (key: string) => {
+    const target = chooser() ?? element().querySelector<HTMLElement>('td[tabindex="0"]')!;
+    target.dispatchEvent(new KeyboardEvent('keydown', { key, bubbles: true, cancelable: true }));
+    await fixture.whenStable();
+  };
+
+  beforeEach(async () => {
+    TestBed.configureTestingModule({ providers: [words] });
+    signIn();
+    fixture = TestBed.createComponent(TestWays);
+    document.body.append(element());
+    await fixture.whenStable();
+  });
+
+  afterEach(() => element().remove());
+
+  it('offers them with the present one chosen, by Enter as by typing', async () => {
+    await press('s');
+    expect(chooser()?.value).toBe('lays');
+    expect([...chooser()!.options].map(({ value }) => value)).toEqual(['sheets', 'lays', 'patches']);
+    expect(document.activeElement).toBe(chooser());
+  });
+
+  it('hands out what is chosen at once, and only once', async () => {
+    await press('Enter');
+    chooser()!.value = 'patches';
+    chooser()!.dispatchEvent(new Event('change'));
+    await fixture.whenStable();
+    expect(fixture.componentInstance.edits).toEqual([{ rowId: 'a', key: 'way', text: 'patches' }]);
+  });
+
+  it('leaves everything as it was by Escape', async () => {
+    await press('Enter');
+    await press('Escape');
+    expect([chooser(), fixture.componentInstance.edits]).toEqual([null, []]);
+  });
+});

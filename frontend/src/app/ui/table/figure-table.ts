@@ -87,7 +87,7 @@ export class FigureTable<Row> {
     const next = placeAfter(event.ctrlKey ? `Control+${event.key}` : event.key, this.place(), this.size());
     if (next) this.move(next);
     else if (event.key === 'Enter' || event.key === 'F2') this.open();
-    else if (isWritten && this.isEditable()) this.draft.set(event.key);
+    else if (isWritten && this.isEditable()) this.begin(event.key);
     else return;
     event.preventDefault();
     this.focusCell();
@@ -115,6 +115,11 @@ export class FigureTable<Row> {
   protected commit(text: string): void {
     if (this.draft() === undefined) return;
     this.draft.set(undefined);
+    this.take(text);
+  }
+
+  /** Hands out what differs from what stands there. */
+  protected take(text: string): void {
     const { line, column } = this.at();
     if (line && column && text !== column.text(line.row)) this.edited.emit({ rowId: line.id, key: column.key, text });
   }
@@ -171,6 +176,12 @@ export class FigureTable<Row> {
     this.place.set(place);
   }
 
+  /** Typing begins an entry anew; where one chooses it only opens the choices. */
+  private begin(key: string): void {
+    if (this.at().column?.choices) this.open();
+    else this.draft.set(key);
+  }
+
   private open(): void {
     const { line, column } = this.at();
     if (!line || !column) return;
@@ -183,7 +194,7 @@ export class FigureTable<Row> {
   private focusCell(): void {
     const focus = () => {
       const cell = this.host.nativeElement.querySelector<HTMLElement>('[tabindex="0"]');
-      (cell?.querySelector('input') ?? cell)?.focus();
+      (cell?.querySelector<HTMLElement>('input, select') ?? cell)?.focus();
     };
     afterNextRender(focus, { injector: this.injector });
   }
