@@ -1,11 +1,13 @@
 import type { App } from '../backend/src/app';
 import type { Platform } from '../backend/src/platform/platform';
+import { demonstrationJobs } from './demonstration-jobs';
 import {
   demonstrationPeople,
   demonstrationSettings,
   demonstrationWorkshop,
   type DemonstrationPerson,
 } from './demonstration-people';
+import { seedJob } from './seed-job';
 
 async function welcome(app: App, person: DemonstrationPerson, password: string) {
   const entry = { name: person.name, email: person.email, password, address: 'demonstration' };
@@ -33,7 +35,8 @@ async function foundWorkshop(app: App, password: string) {
 export function seedDemonstration(app: App, { database }: Platform, password: string): Promise<boolean> {
   return database.transaction(async () => {
     if (await app.accounts.isAnyFounded()) return false;
-    await foundWorkshop(app, password);
+    const owner = await foundWorkshop(app, password);
+    for (const job of demonstrationJobs()) await seedJob(app, owner, job);
     return true;
   });
 }
