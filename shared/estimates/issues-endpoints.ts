@@ -46,7 +46,12 @@ export const readDifferences = endpoint({
   answers: sameForPriced(z.strictObject({ letter: z.string().nullable(), lines: z.array(lineDifferenceSchema) })),
 });
 
-const frozen = { summary: pricedIssueSummarySchema, differences: z.array(lineDifferenceSchema) };
+const frozen = {
+  summary: pricedIssueSummarySchema,
+  differences: z.array(lineDifferenceSchema),
+  /** Each alternative by itself: its gross total and what it is more or less than the base. */
+  alternatives: z.array(z.strictObject({ id: identifier, gross_minor: z.int(), difference_minor: z.int() })),
+};
 
 export const readIssue = endpoint({
   name: 'readIssue',

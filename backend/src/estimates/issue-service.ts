@@ -126,6 +126,7 @@ export class IssueService {
     return {
       summary: presentIssue(row),
       differences: before ? lineDifferences(namedLines(thawedSnapshot(before)), namedLines(snapshot)) : [],
+      alternatives: snapshot.alternatives,
       estimate: presentEstimate(whole, snapshot.figures, audienceOf(actor.roles)) as CostedEstimate | PricedEstimate,
     };
   }

@@ -1,12 +1,12 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import { MatButton } from '@angular/material/button';
-import { Router } from '@angular/router';
 import { Formats } from '../../core/formats/formats';
-import { ReasonPanel } from '../../ui/figure/reason-panel';
+import type { Explained } from '../../ui/figure/explained';
 import { FindingList } from '../../ui/page/finding-list';
 import { EstimateStore } from '../estimate-store';
 import { PartList } from '../parts/part-list';
 import { PartPlace } from '../parts/part-place';
+import { PlaceExplanation } from '../places/place-explanation';
 import { AlternativesPart } from './alternatives-part';
 import { CardPart } from './card-part';
 import { CardsInUse } from './cards-in-use';
@@ -15,6 +15,7 @@ import { MoneyBar } from './money-bar';
 import { PresentationChoice } from './presentation-choice';
 import { PriceLines } from './price-lines';
 import { pricePartKeys, PriceParts, type PricePartKey } from './price-parts';
+import { profitExplained } from './profit-explained';
 import { ProfitForm } from './profit-form';
 import { StagesPart } from './stages-part';
 
@@ -33,17 +34,15 @@ import { StagesPart } from './stages-part';
     PresentationChoice,
     PriceLines,
     ProfitForm,
-    ReasonPanel,
     StagesPart,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
-  providers: [CardsInUse, PriceParts],
+  providers: [CardsInUse, PlaceExplanation, PriceParts],
   templateUrl: './price-page.html',
   styleUrl: './price-page.scss',
 })
 export class PricePage {
   private readonly formats = inject(Formats);
-  private readonly router = inject(Router);
   protected readonly store = inject(EstimateStore);
   protected readonly parts = inject(PriceParts);
 
@@ -68,14 +67,20 @@ export class PricePage {
     const names = new Map((this.store.card()?.money.taxCategories ?? []).map(({ id, name }) => [id, name]));
     return (taxCategoryId: string) => names.get(taxCategoryId) ?? '';
   });
-  protected readonly net = computed(() => this.formats.money(this.store.priced()?.price.net_minor ?? 0));
+  /** What the place is about: what is left of the price, or for the office how it adds up. */
+  private readonly about = computed<Explained | undefined>(() => {
+    const [priced, cost] = [this.store.priced(), this.store.costed()?.cost.price];
+    if (cost) return profitExplained(this.formats, cost);
+    return (
+      priced && { id: 'sum net', heading: this.formats.money(priced.price.net_minor), reasons: priced.price.reasons }
+    );
+  });
+
+  constructor() {
+    inject(PlaceExplanation).follow(this.about);
+  }
 
   protected present(presentation: 'members' | 'kinds'): void {
     this.store.changeSettings({ presentation });
-  }
-
-  /** A house value is changed where it stands, in the rate card. */
-  protected openCard(value: string): void {
-    void this.router.navigate(['/rates', this.store.head()?.rateCardId], { queryParams: { value } });
   }
 }

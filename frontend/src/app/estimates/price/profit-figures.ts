@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, inject, input } from '@an
 import type { PriceCost } from '#shared/estimates/price/price';
 import { Formats } from '../../core/formats/formats';
 import { Figure } from '../../ui/figure/figure';
+import { profitExplained } from './profit-explained';
 
 /** Margin and mark-up beside each other, as asked for and as a discount leaves them, and what that is in money. */
 @Component({
@@ -58,11 +59,7 @@ export class ProfitFigures {
 
   protected readonly profit = computed(() => this.formats.money(this.cost().profit_minor));
   protected readonly priced = computed(() => this.formats.money(this.cost().priced_minor));
-  protected readonly explained = computed(() => ({
-    id: 'profit left',
-    heading: $localize`${this.profit()}:amount: profit`,
-    reasons: this.cost().reasons,
-  }));
+  protected readonly explained = computed(() => profitExplained(this.formats, this.cost()));
 
   protected percent(figure: number | null): string {
     return figure === null ? '–' : $localize`${this.formats.number(figure, 2, 2)}:percent: %`;

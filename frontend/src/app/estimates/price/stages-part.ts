@@ -8,12 +8,13 @@ import type { EditedCell } from '../../ui/table/figure-column';
 import { FigureTable } from '../../ui/table/figure-table';
 import { UnfinishedEntries } from '../draft/unfinished-entries';
 import { EstimateStore } from '../estimate-store';
-import { smallScreen } from './small-screen';
+import { PlanOfPayment } from './plan-of-payment';
 import { readStages, stageEntriesOf, type StageEntry } from './stage-entries';
-import { paymentPlan, stageColumns, type StageRow, type StageWords } from './stage-rows';
+import type { StageRow } from './stage-rows';
 import { StageTermsForm } from './stage-terms-form';
 
 const key = 'stage parts';
+const noTerms = { deposit_percent: 0, retention_percent: 0 };
 
 /** How the contract is paid: deposit, stages that come to 100 %, retention; every payment to the last cent. */
 @Component({
@@ -39,7 +40,7 @@ export class StagesPart {
   private readonly formats = inject(Formats);
   private readonly words = inject(Words);
   private readonly unfinished = inject(UnfinishedEntries);
-  private readonly isSmall = smallScreen();
+  private readonly plan = inject(PlanOfPayment);
   protected readonly store = inject(EstimateStore);
 
   protected readonly chosen = signal<string | undefined>(undefined);
@@ -55,15 +56,11 @@ export class StagesPart {
     const percent = this.formats.figure('percent', Math.abs(missing));
     return missing > 0 ? $localize`${percent}:percent: is missing` : $localize`${percent}:percent: is too much`;
   });
-  protected readonly columns = computed(() =>
-    stageColumns(this.formats, {
-      mayEdit: this.store.mayEdit(),
-      isSmall: this.isSmall(),
-      remark: (cell) => this.remark(cell),
-    }),
-  );
+  protected readonly columns = computed(() => this.plan.columns((cell) => this.remark(cell), this.store.mayEdit()));
   private readonly payments = computed(() => (this.read().stages ? this.store.priced()?.stages : undefined));
-  protected readonly rows = computed(() => paymentPlan(this.entries(), this.payments(), this.planWords()));
+  protected readonly rows = computed(() =>
+    this.plan.rows(this.entries(), this.payments(), this.store.settings()?.stages ?? noTerms),
+  );
   protected readonly totals = computed(() => {
     const gross_minor = this.store.priced()?.price.gross_minor;
     const paid_minor = gross_minor === undefined ? '' : this.formats.amount(gross_minor);
@@ -111,20 +108,5 @@ export class StagesPart {
   private remark(cell: string): string {
     const remark = this.read().remarks.get(cell);
     return remark ? this.words.say(remark.code, remark.values) : '';
-  }
-
-  private planWords(): StageWords {
-    const { deposit_percent = 0, retention_percent = 0 } = this.store.settings()?.stages ?? {};
-    const [taken, held] = [deposit_percent, retention_percent / 2].map((share) =>
-      this.formats.figure('percent', share),
-    );
-    return {
-      deposit: $localize`Deposit, ${taken}:percent:`,
-      whole: $localize`All of the work`,
-      releases: [
-        $localize`Retention, first half, ${held}:percent:`,
-        $localize`Retention, second half, ${held}:percent:`,
-      ],
-    };
   }
 }

@@ -1,0 +1,1 @@
+export { JobEstimates } from './job-estimates';

@@ -1,0 +1,59 @@
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import type { Alternative } from '#shared/estimates/settings';
+import { Formats } from '../../core/formats/formats';
+import type { AlternativeTotal } from '../price/alternative-totals';
+
+/** The alternatives of an issue with what each comes to, as it was frozen. */
+@Component({
+  selector: 'app-frozen-alternatives',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `
+    @if (rows().length > 0) {
+      <table>
+        <caption i18n>
+          Alternatives
+        </caption>
+        <thead>
+          <tr>
+            <th scope="col" class="words" i18n>Alternative</th>
+            <th scope="col" i18n>With tax</th>
+            <th scope="col" i18n>To the base</th>
+          </tr>
+        </thead>
+        <tbody>
+          @for (row of rows(); track row.id) {
+            <tr>
+              <th scope="row">{{ row.name }}</th>
+              <td>{{ row.gross }}</td>
+              <td>{{ row.difference }}</td>
+            </tr>
+          }
+        </tbody>
+      </table>
+    }
+  `,
+  styleUrl: '../price/small-table.scss',
+})
+export class FrozenAlternatives {
+  private readonly formats = inject(Formats);
+
+  readonly alternatives = input.required<readonly Pick<Alternative, 'id' | 'name'>[]>();
+  readonly totals = input.required<readonly AlternativeTotal[]>();
+
+  protected readonly rows = computed(() =>
+    this.alternatives().map(({ id, name }) => {
+      const total = this.totals().find((one) => one.id === id);
+      return {
+        id,
+        name,
+        gross: total ? this.formats.money(total.gross_minor) : '',
+        difference: total ? this.difference(total.difference_minor) : '',
+      };
+    }),
+  );
+
+  private difference(difference_minor: number): string {
+    const sign = difference_minor > 0 ? '+ ' : difference_minor < 0 ? '− ' : '';
+    return `${sign}${this.formats.money(Math.abs(difference_minor))}`;
+  }
+}

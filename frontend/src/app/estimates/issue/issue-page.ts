@@ -1,0 +1,70 @@
+import { ChangeDetectionStrategy, Component, computed, inject, input, resource } from '@angular/core';
+import { Formats } from '../../core/formats/formats';
+import { EstimateStore } from '../estimate-store';
+import { PartList } from '../parts/part-list';
+import { PartPlace } from '../parts/part-place';
+import { PlaceExplanation } from '../places/place-explanation';
+import { AlternativeTotals } from '../price/alternative-totals';
+import { DifferenceTable } from '../price/difference-table';
+import { PresentationChoice } from '../price/presentation-choice';
+import { BenchSheets } from './bench-sheets';
+import { IssueBox } from './issue-box';
+import { IssueClient } from './issue-client';
+import { draftKey, IssueParts } from './issue-parts';
+import { IssueTextsForm } from './issue-texts-form';
+import { Letterhead } from './letterhead';
+import { PaperPreview } from './paper-preview';
+import { Validity } from './validity';
+
+/** Issue: the draft as it would go out next, what is new in it, what its paper says; and the issues made so far. */
+@Component({
+  selector: 'app-issue-page',
+  imports: [
+    BenchSheets,
+    DifferenceTable,
+    IssueBox,
+    IssueTextsForm,
+    PaperPreview,
+    PartList,
+    PartPlace,
+    PresentationChoice,
+  ],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  providers: [AlternativeTotals, IssueParts, Letterhead, PlaceExplanation, Validity],
+  templateUrl: './issue-page.html',
+  styleUrl: './issue-page.scss',
+})
+export class IssuePage {
+  private readonly client = inject(IssueClient);
+  private readonly formats = inject(Formats);
+  protected readonly store = inject(EstimateStore);
+  protected readonly parts = inject(IssueParts);
+
+  /** The draft, where the address asks for it: on a phone it is shown instead of the list. */
+  readonly part = input<string>();
+
+  private readonly differencesRead = resource({
+    // Another version of the draft, or another newest issue, differs otherwise.
+    params: () => {
+      const head = this.store.head();
+      const letter = this.store.issues().at(0)?.letter;
+      return head && letter ? { id: head.id, version: head.version, letter } : undefined;
+    },
+    loader: ({ params, abortSignal }) => this.client.differences(params.id, abortSignal),
+  });
+  protected readonly differences = computed(() =>
+    this.differencesRead.hasValue() ? this.differencesRead.value() : undefined,
+  );
+  protected readonly before = computed(() => $localize`Issue ${this.differences()?.letter ?? ''}:letter:`);
+  protected readonly net = computed(() => this.formats.money(this.store.priced()?.price.net_minor ?? 0));
+  protected readonly gross = computed(() => this.formats.money(this.store.priced()?.price.gross_minor ?? 0));
+  protected readonly draftKey = draftKey;
+
+  constructor() {
+    inject(PlaceExplanation);
+  }
+
+  protected present(presentation: 'members' | 'kinds'): void {
+    this.store.changeSettings({ presentation });
+  }
+}

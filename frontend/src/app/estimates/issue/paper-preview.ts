@@ -1,0 +1,58 @@
+import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { Formats } from '../../core/formats/formats';
+import { EstimateStore } from '../estimate-store';
+import { AlternativeTotals } from '../price/alternative-totals';
+import { PriceLines } from '../price/price-lines';
+import { IssueParts } from './issue-parts';
+import { Letterhead } from './letterhead';
+import { Validity } from './validity';
+
+/** What the client's paper will say: letterhead, lines without cost, alternatives, texts, until when prices hold. */
+@Component({
+  selector: 'app-paper-preview',
+  imports: [PriceLines],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './paper-preview.html',
+  styleUrl: './paper-preview.scss',
+})
+export class PaperPreview {
+  private readonly formats = inject(Formats);
+  private readonly totals = inject(AlternativeTotals);
+  private readonly validity = inject(Validity);
+  protected readonly store = inject(EstimateStore);
+  protected readonly parts = inject(IssueParts);
+  protected readonly letterhead = inject(Letterhead);
+
+  protected readonly today = computed(() => this.formats.day(this.validity.today()));
+  protected readonly until = computed(() => this.formats.day(this.validity.until()));
+  protected readonly leafUntil = computed(() => this.formats.day(this.validity.leafUntil()));
+  protected readonly reach = computed(() => {
+    const workshop = this.letterhead.workshop();
+    return [workshop?.telephone, workshop?.email].filter(Boolean).join(' · ');
+  });
+  protected readonly memberNames = computed(() => new Map(this.store.members().map(({ id, name }) => [id, name])));
+  protected readonly alternatives = computed(() =>
+    (this.store.settings()?.alternatives ?? []).map(({ id, name, note }) => ({
+      id,
+      name,
+      note,
+      difference: this.difference(this.totals.totals().get(id)?.difference_minor),
+    })),
+  );
+  protected readonly texts = computed(() => {
+    const { included = '', excluded = '', terms = '' } = this.store.settings() ?? {};
+    const all = [
+      { heading: $localize`Included`, text: included },
+      { heading: $localize`Not included`, text: excluded },
+      { heading: $localize`Terms`, text: terms },
+    ];
+    return all.filter(({ text }) => text.trim() !== '');
+  });
+
+  private difference(difference_minor: number | undefined): string {
+    if (difference_minor === undefined) return '';
+    const money = this.formats.money(Math.abs(difference_minor));
+    if (difference_minor === 0) return $localize`at the same price`;
+    return `${difference_minor < 0 ? '− ' : '+ '}${money}`;
+  }
+}
