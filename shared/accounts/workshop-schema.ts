@@ -1,5 +1,6 @@
 import * as z from 'zod';
 import { paperSizes, taxCategories } from '#shared/accounts/workshop-options';
+import { currencyCodes } from '#shared/money/currency-digits';
 import { complain } from '#shared/problems/complaints-of';
 import { identifier, line, optionalLine, version } from '#shared/problems/entry-schema';
 import { lengthUnits } from '#shared/units/length-unit';
@@ -16,9 +17,7 @@ const isTimeZone = (name: string): boolean => isKnown(() => new Intl.DateTimeFor
 const isLocale = (name: string): boolean => isKnown(() => Intl.getCanonicalLocales(name)[0]);
 
 /** An ISO 4217 code, an IANA time zone, a BCP 47 locale and an ISO 3166-1 country. */
-export const currencyCode = z
-  .string()
-  .refine((code) => Intl.supportedValuesOf('currency').includes(code), complain('entry-not-offered'));
+export const currencyCode = z.string().refine((code) => currencyCodes.includes(code), complain('entry-not-offered'));
 const timeZone = z.string().max(60).refine(isTimeZone, complain('entry-not-offered'));
 const locale = z.string().max(35).refine(isLocale, complain('entry-not-offered'));
 const country = z.string().regex(/^[A-Z]{2}$/);

@@ -40,7 +40,7 @@ function pathsOf(value: Json, path: readonly (string | number)[] = []): (readonl
     : value && typeof value === 'object'
       ? Object.entries(value)
       : [];
-  return inner.flatMap(([name, one]) => [[...path, name], ...pathsOf(one as Json, [...path, name])]);
+  return inner.flatMap(([name, one]) => [[...path, name], ...pathsOf(one, [...path, name])]);
 }
 
 /** A copy of the body in which one entry is another value, or is gone where none is given. */
@@ -75,7 +75,7 @@ const isRefusedWithWords = ({ status, headers, body }: Response): boolean =>
 test.each(withBody.map((endpoint) => [endpoint.name, endpoint] as const))(
   '%s',
   async (name, endpoint) => {
-    const row = allRows[name]!;
+    const row = allRows[name];
     const { visitor, role } = await callerOf(endpoint);
     const caller = { ...api.ours.people[role], visitor };
     const parts: Parts = await row.prepare(api.ours, api, caller);
@@ -102,7 +102,7 @@ test.each(withBody.map((endpoint) => [endpoint.name, endpoint] as const))(
   '%s refuses an entry nobody asked for',
   async (name, endpoint) => {
     const { visitor, role } = await callerOf(endpoint);
-    const parts = await allRows[name]!.prepare(api.ours, api, { ...api.ours.people[role], visitor });
+    const parts = await allRows[name].prepare(api.ours, api, { ...api.ours.people[role], visitor });
     for (const surplus of ['workshopId', 'id2', 'status', 'total_minor', 'isAdmin']) {
       const response = await visitor.call(endpoint, { ...parts, body: { ...(parts.body as object), [surplus]: 'x' } });
       expect(response.status).toBe(400);

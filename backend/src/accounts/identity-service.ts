@@ -1,4 +1,7 @@
+import { currencyDigits } from '#shared/money/currency-digits';
 import { Rejection } from '#shared/problems/rejection';
+import { formatsFor } from '#shared/units/formats-for';
+import type { ValueFormats } from '#shared/words/say';
 import type { Identities, Identity, SignedIn } from '../platform/session/session-control';
 import type { AccountRepository } from './account-repository';
 import type { LoginThrottlePolicy } from './login-throttle-policy';
@@ -30,6 +33,11 @@ export class IdentityService implements Identities {
       person,
       actor: { accountId: account.id, membershipId: membership.id, workshopId, name: account.name, roles },
     };
+  }
+
+  async formatsOf(workshopId: string): Promise<ValueFormats> {
+    const { locale, currency, lengthUnit } = await this.parts.workshops.get(workshopId);
+    return formatsFor({ locale, currency, lengthUnit, digits: currencyDigits(currency) });
   }
 
   /** Takes as long for an unknown address as for a wrong password, and says no more of either. */

@@ -1,5 +1,5 @@
 import { dictionary } from '@zxcvbn-ts/language-common';
-import { Rejection } from '#shared/problems/rejection';
+import type { Rejection } from '#shared/problems/rejection';
 import { refuseWeakPassword } from './password-policy';
 
 const context = ['jonah.pikesley@harbourlane.example', 'Jonah Pikesley', 'Harbour Lane Carvers'];

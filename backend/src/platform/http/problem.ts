@@ -6,7 +6,8 @@ import { Rejection } from '#shared/problems/rejection';
 import * as z from 'zod';
 import { failureOf } from '../database/failure';
 import type { Log } from '../log/log';
-import { words } from './words';
+import type { Identities } from '../session/session-control';
+import { words, wordsFor, type Words } from './words';
 
 interface ParserError {
   readonly type?: string;
@@ -50,7 +51,7 @@ export function rejectionOf(error: unknown): Rejection | undefined {
   return ofDatabase(error) ?? ofParser(error);
 }
 
-function problemOf(rejection: Rejection, requestId: string): Problem {
+function problemOf(rejection: Rejection, requestId: string, words: Words): Problem {
   const { complaints = [], values, detail } = rejection.more;
   return {
     type: `urn:problem:${rejection.code}`,
@@ -76,16 +77,28 @@ export function sendProblem(response: Response, problem: Problem): void {
 
 const level = (status: number): 'warn' | 'info' => (status === 400 || status === 404 ? 'info' : 'warn');
 
+/** The words of whoever asked; plain ones where nobody is known, or their workshop cannot be read just now. */
+async function wordsOf(request: Request, identities: Identities): Promise<Words> {
+  if (request.workshopId === undefined) return words;
+  return identities.formatsOf(request.workshopId).then(wordsFor, () => words);
+}
+
 /** Turns whatever was thrown into `application/problem+json`: a refusal with its words, anything else one bland sentence with a number. */
 export const problemHandler =
-  (log: Log): ErrorRequestHandler =>
-  (error: unknown, request: Request, response: Response, next) => {
+  (log: Log, identities: Identities): ErrorRequestHandler =>
+  async (error: unknown, request: Request, response: Response, next) => {
     if (response.headersSent) return next(error);
+    const { requestId, workshopId, accountId } = request;
     const rejection = rejectionOf(error);
-    const problem = rejection ? problemOf(rejection, request.requestId) : faultOf(request.requestId);
-    const who = { requestId: request.requestId, workshopId: request.workshopId, accountId: request.accountId };
-    if (rejection) log[level(problem.status)]({ ...who, refusal: rejection.code, status: problem.status }, 'refused');
-    else log.error({ ...who, error }, 'fault');
-    if (rejection?.more.retryAfter_seconds) response.set('Retry-After', String(rejection.more.retryAfter_seconds));
+    if (!rejection) {
+      log.error({ requestId, workshopId, accountId, error }, 'fault');
+      return sendProblem(response, faultOf(requestId));
+    }
+    const problem = problemOf(rejection, requestId, await wordsOf(request, identities));
+    log[level(problem.status)](
+      { requestId, workshopId, accountId, refusal: rejection.code, status: problem.status },
+      'refused',
+    );
+    if (rejection.more.retryAfter_seconds) response.set('Retry-After', String(rejection.more.retryAfter_seconds));
     sendProblem(response, problem);
   };

@@ -76,7 +76,7 @@ export function openWebServer(platform: Platform, parts: WebParts): WebServer {
   );
   app.use(apiRouter(parts.routes, { database, sessions, keys }));
   if (parts.catcher && !config.publicUrl) app.get('/development/mail', caughtMails(parts.catcher));
-  app.use(webPages(config.webFolder, parts.isPage), notHere, problemHandler(log));
+  app.use(webPages(config.webFolder, parts.isPage), notHere, problemHandler(log, parts.identities));
   const sweep = async () => void (await Promise.all([store.sweep(), keys.sweep()]));
   return { express: app, readiness, sweep };
 }

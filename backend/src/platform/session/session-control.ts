@@ -1,4 +1,5 @@
 import type { Actor } from '#shared/actor/actor';
+import type { ValueFormats } from '#shared/words/say';
 
 /** What a session remembers of a person: who, and as whom of which workshop. */
 export interface Identity {
@@ -22,6 +23,8 @@ export interface SignedIn {
 export interface Identities {
   /** Who a session speaks for now, or nobody if the account or the membership was ended since. */
   load(identity: Identity): Promise<SignedIn | undefined>;
+  /** How figures are written in a workshop. */
+  formatsOf(workshopId: string): Promise<ValueFormats>;
   /** The identity behind an e-mail address and its password, or nobody; refuses as too many. */
   verify(entry: { email: string; password: string; address: string }): Promise<Identity | undefined>;
 }

@@ -122,7 +122,10 @@ test('several workers share the work without waiting for one another', async () 
 test('a worker that is killed loses nothing: what it had in hand is done by the next', async () => {
   for (let n = 0; n < 40; n++) await add('recorded', { n });
   for (let kill = 0; kill < 3; kill++) {
-    const worker = fork(join(__dirname, 'killed-worker.ts'), [url], { execArgv: ['--import', 'tsx'], stdio: 'ignore' });
+    const worker = fork(join(__dirname, 'work-until-killed.ts'), [url], {
+      execArgv: ['--import', 'tsx'],
+      stdio: 'ignore',
+    });
     await new Promise((resolve) => worker.once('message', resolve));
     await pause(60);
     const ended = new Promise((resolve) => worker.once('exit', resolve));
