@@ -2,6 +2,7 @@ export { extentOf, fittingExtent } from './fitting-extent';
 export { HoursTable } from './hours-table';
 export { type CatalogueEntry, foundEntries, ornamentCatalogue } from './ornament-catalogue';
 export { OrnamentForm } from './ornament-form';
+export { OrnamentPicker } from './ornament-picker';
 export { planNames } from './plan-names';
 export { RunDrawing } from './run-drawing';
 export { type RunItem, runItems } from './run-items';

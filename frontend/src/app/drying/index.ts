@@ -1,5 +1,5 @@
 export { DryingRibbon } from './drying-ribbon';
-export { gatheredFindings } from './gathered-findings';
+export { gatheredFindings, type GatheredFinding } from './gathered-findings';
 export { JointMovement } from './joint-movement';
 export { LotSteps } from './lot-steps';
 export type { WorkedLot } from './worked-lot';

@@ -23,11 +23,22 @@ export class MemberSelection {
   /** Whether the address names one: on a phone it is shown instead of the list. */
   readonly isChosen = computed(() => this.asked() !== null);
 
+  private readonly whole = signal(false);
+  /** Whether the place shows the whole job while no member is asked for. */
+  readonly showsWhole = this.whole.asReadonly();
+  /** The member the place shows; undefined where it shows the whole job. */
+  readonly shown = computed(() => (this.showsWhole() && !this.isChosen() ? undefined : this.member()));
+
   constructor() {
     effect(() => {
       const asked = this.asked();
       if (asked !== null) this.last.set(asked);
     });
+  }
+
+  /** Says whether the place has something to show of the whole job. */
+  showWhole(showsWhole: boolean): void {
+    this.whole.set(showsWhole);
   }
 
   select(id: string): void {

@@ -15,12 +15,12 @@ import { MemberSelection } from '../members/member-selection';
   selector: 'app-member-place',
   imports: [Icon, MatButton, MemberList, ReasonPanel],
   changeDetection: ChangeDetectionStrategy.OnPush,
-  host: { '[class.chosen]': 'selection.isChosen()' },
+  host: { '[class.chosen]': 'selection.isChosen()', '[class.whole]': 'selection.showsWhole()' },
   template: `
     <aside class="list no-print" i18n-aria-label aria-label="Members"><app-member-list /></aside>
     <div class="content">
       <button matButton type="button" class="back no-print" (click)="selection.showList()">
-        <app-icon name="back" /> <span i18n>All members</span>
+        <app-icon matButtonIcon name="back" /> <span i18n>All members</span>
       </button>
       <ng-content />
     </div>

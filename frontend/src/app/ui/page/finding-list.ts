@@ -26,6 +26,9 @@ const order: readonly FindingKind[] = ['refuse', 'missing', 'warn', 'caution', '
           } @else {
             {{ line.text }}
           }
+          @if (line.minor) {
+            <span class="minor">{{ line.minor }}</span>
+          }
         </li>
       }
     </ul>
@@ -38,6 +41,8 @@ export class FindingList {
   readonly findings = input.required<readonly Finding[]>();
   /** A finding that speaks of a member, zone or ornament can be chosen, to go there. */
   readonly linked = input(false, { transform: booleanAttribute });
+  /** Where it holds, in a smaller line beneath. */
+  readonly minor = input<(finding: Finding) => string>();
   readonly chosen = output<Finding>();
 
   protected readonly lines = computed(() =>
@@ -47,6 +52,7 @@ export class FindingList {
         finding,
         kind: kindNames[finding.kind],
         text: this.words.say(finding.code, finding.values),
+        minor: this.minor()?.(finding),
       })),
   );
 }

@@ -1,0 +1,53 @@
+import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { EstimateStore } from '../estimate-store';
+import { MemberSelection } from '../members/member-selection';
+import { MemberPlace } from '../places/member-place';
+import { PlaceExplanation } from '../places/place-explanation';
+import { placeShowsWhole } from '../places/place-shows-whole';
+import { FindingList } from '../../ui/page/finding-list';
+import { MemberCarving } from './member-carving';
+import { WholeCarving } from './whole-carving';
+
+/** Carve: the ornaments of the selected member with their hours, or the carving of the whole job. */
+@Component({
+  selector: 'app-carve-page',
+  imports: [FindingList, MemberCarving, MemberPlace, WholeCarving],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  providers: [PlaceExplanation],
+  template: `
+    <app-member-place>
+      @if (selection.shown(); as member) {
+        <app-member-carving [member]="member" />
+      } @else {
+        <app-whole-carving />
+      }
+      <app-finding-list beside linked [findings]="findings()" />
+    </app-member-place>
+  `,
+  styles: `
+    :host {
+      display: flex;
+      flex: 1;
+      min-width: 0;
+    }
+  `,
+})
+export class CarvePage {
+  private readonly store = inject(EstimateStore);
+  protected readonly selection = inject(MemberSelection);
+
+  /** What is to be told of the ornaments shown, and of the dust of carving at all. */
+  protected readonly findings = computed(() => {
+    const member = this.selection.shown();
+    const own =
+      member?.ornaments.map(({ id }) => id) ??
+      this.store.members().flatMap(({ ornaments }) => ornaments.map(({ id }) => id));
+    return (this.store.figures()?.findings ?? []).filter(
+      ({ code, about }) => code.startsWith('carving-') && (about === undefined || own.includes(about)),
+    );
+  });
+
+  constructor() {
+    placeShowsWhole();
+  }
+}

@@ -1,0 +1,69 @@
+import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
+import { Router } from '@angular/router';
+import { BatchList } from '../../buildups';
+import { Formats } from '../../core/formats/formats';
+import { DryingRibbon, JointMovement, LotSteps } from '../../drying';
+import { ReasonPanel } from '../../ui/figure/reason-panel';
+import { EmptyState } from '../../ui/page/empty-state';
+import { FindingList } from '../../ui/page/finding-list';
+import { EstimateStore } from '../estimate-store';
+import { PlaceExplanation } from '../places/place-explanation';
+import { AirForm } from './air-form';
+import { DryCautions } from './dry-cautions';
+import { DryLots } from './dry-lots';
+import { LotTable } from './lot-table';
+import { WoodMoisture } from './wood-moisture';
+
+/** Dry: the coats of every lot laid into the working week in the shop's air, as elapsed time; dates come with the programme. */
+@Component({
+  selector: 'app-dry-page',
+  imports: [
+    AirForm,
+    BatchList,
+    DryingRibbon,
+    EmptyState,
+    FindingList,
+    JointMovement,
+    LotSteps,
+    LotTable,
+    ReasonPanel,
+    WoodMoisture,
+  ],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  providers: [DryCautions, DryLots, PlaceExplanation],
+  templateUrl: './dry-page.html',
+  styleUrl: './dry-page.scss',
+})
+export class DryPage {
+  private readonly formats = inject(Formats);
+  private readonly router = inject(Router);
+  private readonly asked = signal<string | undefined>(undefined);
+  protected readonly store = inject(EstimateStore);
+  protected readonly lots = inject(DryLots);
+  protected readonly cautions = inject(DryCautions);
+
+  protected readonly dry = computed(() => this.store.figures()?.dry);
+  protected readonly heading = computed(() => {
+    const dry = this.dry();
+    if (!dry) return '';
+    const [days, weeks] = [this.formats.number(dry.elapsed_workingDays, 0), this.formats.number(dry.elapsed_weeks, 1)];
+    return $localize`${days}:days: working days, ${weeks}:weeks: weeks`;
+  });
+  /** The lot whose steps are told: the one chosen, else the first. */
+  protected readonly chosen = computed(
+    () => this.lots.all().find(({ lotId }) => lotId === this.asked()) ?? this.lots.all().at(0),
+  );
+
+  protected choose(lotId: string | undefined): void {
+    this.asked.set(lotId);
+  }
+
+  constructor() {
+    inject(PlaceExplanation);
+  }
+
+  /** A house value is changed where it stands, in the rate card. */
+  protected openCard(value: string): void {
+    void this.router.navigate(['/rates', this.store.head()?.rateCardId], { queryParams: { value } });
+  }
+}

@@ -1,0 +1,114 @@
+import { Injectable, inject } from '@angular/core';
+import { laidAs } from '../../leaf';
+import { Formats } from '../../core/formats/formats';
+import type { Explained } from '../../ui/figure/explained';
+import type { FigureColumn } from '../../ui/table/figure-column';
+import { EstimateStore } from '../estimate-store';
+import type { ZoneRow } from './zone-row';
+
+type Column = FigureColumn<ZoneRow>;
+
+/** The columns of the zones of a member. */
+@Injectable({ providedIn: 'root' })
+export class ZoneColumns {
+  private readonly formats = inject(Formats);
+
+  /** `remark` says what is wrong with a name. */
+  of(store: EstimateStore, isSmall: boolean, remark: (row: ZoneRow) => string): readonly Column[] {
+    const name: Column = {
+      key: 'name',
+      heading: $localize`Zone`,
+      kind: 'text',
+      text: ({ zone }) => zone.name,
+      minor: (row) => (isSmall ? this.small(row) : this.alternative(row, store)),
+      editable: store.mayEdit(),
+      remark,
+    };
+    const wide = [this.buildUp(), this.laid(), this.area()];
+    return [name, ...(isSmall ? [] : wide), this.leaves(), ...(store.costed() ? [this.money()] : [])];
+  }
+
+  /** How the leaves of a zone came about, to stand beside the table. */
+  explained({ zone, worked }: ZoneRow): Explained | undefined {
+    if (!worked?.leaf) return undefined;
+    const leaves = worked.leaf.grossLeaves.likely;
+    return { id: `leaf ${zone.id}`, heading: this.formats.figure('leaves', leaves), reasons: worked.leaf.reasons };
+  }
+
+  /** The bottom line of a member. */
+  totals(name: string, rows: readonly ZoneRow[]): Record<string, string> {
+    const sum = (pick: (row: ZoneRow) => number) => rows.reduce((total, row) => total + pick(row), 0);
+    const leaves = sum(({ worked }) => worked?.leaf?.grossLeaves.likely ?? 0);
+    return {
+      name,
+      area: this.areaText(sum(({ worked }) => worked?.true_mm2 ?? 0)),
+      leaves: leaves > 0 ? this.formats.number(leaves, 1, 1) : '',
+      money: leaves > 0 ? this.formats.amount(sum(({ leaf_minor }) => leaf_minor ?? 0)) : '',
+    };
+  }
+
+  areaText(area_mm2: number): string {
+    return this.formats.area(area_mm2);
+  }
+
+  private buildUp(): Column {
+    return {
+      key: 'buildUp',
+      heading: $localize`Build-up`,
+      kind: 'text',
+      text: ({ zone, worked }) => worked?.buildUp ?? zone.buildUpId,
+    };
+  }
+
+  private laid(): Column {
+    return {
+      key: 'laid',
+      heading: $localize`Laid as`,
+      kind: 'chip',
+      text: ({ worked }) => (worked?.leaf ? laidAs(worked.leaf) : $localize`no leaf`),
+    };
+  }
+
+  private area(): Column {
+    return {
+      key: 'area',
+      heading: $localize`True surface`,
+      kind: 'figure',
+      text: ({ worked }) => (worked ? this.areaText(worked.true_mm2) : '–'),
+      explained: ({ zone, worked }) =>
+        worked && { id: `zone ${zone.id}`, heading: this.areaText(worked.true_mm2), reasons: worked.reasons },
+    };
+  }
+
+  private leaves(): Column {
+    return {
+      key: 'leaves',
+      heading: $localize`Leaves`,
+      kind: 'figure',
+      text: ({ worked }) => (worked?.leaf ? this.formats.number(worked.leaf.grossLeaves.likely, 1, 1) : '–'),
+      explained: (row) => this.explained(row),
+    };
+  }
+
+  private money(): Column {
+    return {
+      key: 'money',
+      heading: $localize`Leaf, ${this.formats.currencySign()}:currency:`,
+      kind: 'figure',
+      text: ({ leaf_minor }) => (leaf_minor === null ? '' : this.formats.amount(leaf_minor)),
+    };
+  }
+
+  /** What the columns of a phone leave out. */
+  private small({ worked }: ZoneRow): string {
+    if (!worked) return '';
+    return [worked.buildUp, worked.leaf ? laidAs(worked.leaf) : '', this.areaText(worked.true_mm2)]
+      .filter(Boolean)
+      .join(', ');
+  }
+
+  private alternative({ zone }: ZoneRow, store: EstimateStore): string {
+    const name = store.settings()?.alternatives.find(({ id }) => id === zone.alternativeId)?.name;
+    return name ? $localize`in “${name}:alternative:”` : '';
+  }
+}

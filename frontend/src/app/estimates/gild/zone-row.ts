@@ -1,0 +1,12 @@
+import type { ZoneFigures } from '#shared/estimates/figures';
+import type { Zone } from '#shared/estimates/member';
+
+/** One zone of the member as the table has it: where it stands in the form, and what it comes to. */
+export interface ZoneRow {
+  readonly zone: Zone;
+  readonly path: string;
+  /** Undefined where it belongs to an alternative that is not chosen. */
+  readonly worked: ZoneFigures | undefined;
+  /** Its leaf at the list price; null where nobody may know, or no leaf is laid. */
+  readonly leaf_minor: number | null;
+}

@@ -1,0 +1,30 @@
+import { DestroyRef, Injectable, effect, inject, untracked } from '@angular/core';
+import type { Explained } from '../../ui/figure/explained';
+import { Explanation } from '../../ui/figure/explanation';
+
+/** Keeps the reasons beside a place in step with what it shows. Provide it with the page. */
+@Injectable()
+export class PlaceExplanation {
+  private readonly explanation = inject(Explanation);
+
+  constructor() {
+    inject(DestroyRef).onDestroy(() => this.explanation.close());
+  }
+
+  /**
+   * Where there is room beside it, what the place is about explains itself unasked; another thing, or nothing, takes its place. On a
+   * phone the reasons would cover the page, so they wait to be asked for.
+   */
+  follow(explained: () => Explained | undefined): void {
+    let shown: string | undefined;
+    effect(() => {
+      const next = explained();
+      untracked(() => {
+        if (next?.id === shown) return;
+        shown = next?.id;
+        if (next && matchMedia('(min-width: 901px)').matches) this.explanation.show(next);
+        else this.explanation.close();
+      });
+    });
+  }
+}
