@@ -3,6 +3,7 @@ import { cheapestPacks, type PackCount } from '#shared/buildups/cheapest-packs';
 import type { MaterialNeed } from '#shared/buildups/zone-materials';
 import { D, type DecimalText } from '#shared/money/decimal';
 import { settled } from '#shared/money/settled';
+import { groupedBy } from '#shared/units/grouped-by';
 import type { Finding } from '#shared/words/finding';
 import type { Reason } from '#shared/words/reason';
 
@@ -67,15 +68,16 @@ function inPacks(material: Material, need: D): MaterialBought {
   return { materialId: id, name, unit, ...bought, reasons: [reason], findings: [] };
 }
 
-function totalNeed(material: Material, needs: readonly MaterialNeed[]): D {
-  const quantity = needs.filter((one) => one.materialId === material.id).reduce((sum, one) => sum + one.quantity, 0);
+function totalNeed(needs: readonly MaterialNeed[]): D {
+  const quantity = needs.reduce((sum, one) => sum + one.quantity, 0);
   return new D(String(settled(quantity))).toDecimalPlaces(6, D.ROUND_UP);
 }
 
 /** What a job buys, one entry for each material needed, in the card's order: whole packs in the cheapest mix, or pro rata, as the card says. */
 export function materialsBought(needs: readonly MaterialNeed[], card: BuildUpCard): MaterialBought[] {
+  const byMaterial = groupedBy(needs, (need) => need.materialId);
   return card.materials.flatMap((material) => {
-    const need = totalNeed(material, needs);
+    const need = totalNeed(byMaterial.get(material.id) ?? []);
     if (need.isZero()) return [];
     return [card.buying === 'pro-rata' ? proRata(material, need, []) : inPacks(material, need)];
   });

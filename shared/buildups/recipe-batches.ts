@@ -4,6 +4,7 @@ import type { BuildUpCard, Recipe } from '#shared/buildups/buildup-card';
 import { stepsDone } from '#shared/buildups/steps-done';
 import type { ZoneFacts } from '#shared/buildups/zone-facts';
 import { amountTaken } from '#shared/buildups/zone-materials';
+import { groupedBy } from '#shared/units/grouped-by';
 
 /** One part of a batch, in litres, and in grams where the card says what a litre of it weighs. */
 export interface RecipeBatchPart extends Omit<BatchPart, 'materialId'> {
@@ -25,12 +26,24 @@ export interface ZoneOfBatch {
   readonly facts: ZoneFacts;
 }
 
-function litresOn({ buildUp, facts }: ZoneOfBatch, recipeId: string, card: BuildUpCard): number {
-  const steps = buildUp ? stepsDone(buildUp, facts) : [];
-  const uses = steps.flatMap((step) => step.uses.map((use) => ({ use, step, facts, card })));
-  return uses
-    .filter(({ use }) => use.of === 'recipe' && use.itemId === recipeId)
-    .reduce((sum, on) => sum + amountTaken(on), 0);
+type Litres = Map<string, number>;
+
+const pour = (into: Litres, recipeId: string, litres: number): void =>
+  void into.set(recipeId, (into.get(recipeId) ?? 0) + litres);
+
+/** Litres of each recipe on one zone. */
+function litresOn({ buildUp, facts }: ZoneOfBatch, card: BuildUpCard): Litres {
+  const litres: Litres = new Map();
+  for (const step of buildUp ? stepsDone(buildUp, facts) : [])
+    for (const use of step.uses)
+      if (use.of === 'recipe') pour(litres, use.itemId, amountTaken({ use, step, facts, card }));
+  return litres;
+}
+
+function litresOf(zones: readonly ZoneOfBatch[], card: BuildUpCard): Litres {
+  const litres: Litres = new Map();
+  for (const zone of zones) for (const [recipeId, more] of litresOn(zone, card)) pour(litres, recipeId, more);
+  return litres;
 }
 
 function partsOf(recipe: Recipe, volume_litres: number, card: BuildUpCard): RecipeBatchPart[] {
@@ -42,14 +55,13 @@ function partsOf(recipe: Recipe, volume_litres: number, card: BuildUpCard): Reci
 
 /** What to mix of each recipe for each piece, loss included, in litres: pieces in the order of their zones, recipes in the card's. */
 export function recipeBatches(zones: readonly ZoneOfBatch[], card: BuildUpCard): RecipeBatch[] {
-  const pieces = [...new Set(zones.map(({ facts }) => facts.pieceId))];
-  return pieces.flatMap((pieceId) =>
-    card.recipes.flatMap((recipe) => {
-      const own = zones.filter(({ facts }) => facts.pieceId === pieceId);
-      const volume_litres = own.reduce((sum, zone) => sum + litresOn(zone, recipe.id, card), 0);
+  return [...groupedBy(zones, ({ facts }) => facts.pieceId)].flatMap(([pieceId, own]) => {
+    const litres = litresOf(own, card);
+    return card.recipes.flatMap((recipe) => {
+      const volume_litres = litres.get(recipe.id) ?? 0;
       if (volume_litres === 0) return [];
       const { id: recipeId, name } = recipe;
       return [{ pieceId, recipeId, name, volume_litres, parts: partsOf(recipe, volume_litres, card) }];
-    }),
-  );
+    });
+  });
 }

@@ -4,19 +4,19 @@ import type { CarvingWork } from '#shared/carving/carving-work';
 import { gradesTogether, hoursOfKinds, rowsTogether, sharpeningRows } from '#shared/carving/hours-rows';
 import { hoursOfUses, unknownOrnaments } from '#shared/carving/hours-of-uses';
 import { patternHours, patternRows } from '#shared/carving/pattern-hours';
-import { recutHours, recutRows, recutRowsOfUse } from '#shared/carving/recut-hours';
+import { recutHours, recutRows, recutRowsOfUse, recutZonesById } from '#shared/carving/recut-hours';
+import { groupedBy } from '#shared/units/grouped-by';
 import { tripleSum } from '#shared/units/triple-sum';
 import type { Finding } from '#shared/words/finding';
 import type { Reason } from '#shared/words/reason';
 
 function ornamentTotals(uses: readonly UseHours[], work: CarvingWork, card: CarvingCard): OrnamentHours[] {
-  const ids = [...new Set(uses.map((use) => use.ornamentId))];
-  return ids.map((ornamentId) => {
-    const own = uses.filter((use) => use.ornamentId === ornamentId);
+  const recut = recutZonesById(work.recut);
+  return [...groupedBy(uses, (use) => use.ornamentId)].map(([ornamentId, own]) => {
     const rows = own.flatMap((use) => [
       ...use.rows,
       ...sharpeningRows(use.rows, card.sharpening_percent),
-      ...recutRowsOfUse(use, work.recut, card),
+      ...recutRowsOfUse(use, recut, card),
     ]);
     return { ornamentId, carving: tripleSum(own.map((use) => use.carving)), grades: gradesTogether(rows) };
   });

@@ -50,12 +50,14 @@ export function hoursOfUses(uses: readonly CarvedUse[], card: CarvingCard): UseH
 }
 
 /** A missing fact for every use whose ornament is in no list of the card. */
-export const unknownOrnaments = (uses: readonly CarvedUse[], card: CarvingCard): Finding[] =>
-  uses
-    .filter(({ use }) => ![...card.ornaments, ...card.items].some((known) => known.id === use.ornamentId))
+export function unknownOrnaments(uses: readonly CarvedUse[], card: CarvingCard): Finding[] {
+  const known = new Set([...card.ornaments, ...card.items].map(({ id }) => id));
+  return uses
+    .filter(({ use }) => !known.has(use.ornamentId))
     .map(({ use }) => ({
       kind: 'missing',
       code: 'carving-ornament-unknown',
       values: { ornament: use.ornamentId },
       about: use.id,
     }));
+}

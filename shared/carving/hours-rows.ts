@@ -1,14 +1,11 @@
 import type { CarvingHoursRow, CarvingWorkKind, GradeHours } from '#shared/carving/carving-result';
+import { groupedBy } from '#shared/units/grouped-by';
 import { mapTriple, type Triple } from '#shared/units/triple';
 import { tripleSum } from '#shared/units/triple-sum';
 
 const together = <Row extends { readonly hours: Triple }>(rows: readonly Row[], keyOf: (row: Row) => string): Row[] => {
-  const groups = new Map<string, Row[]>();
-  for (const row of rows) groups.set(keyOf(row), [...(groups.get(keyOf(row)) ?? []), row]);
-  return [...groups.values()].map((group) => ({
-    ...group[0],
-    hours: tripleSum(group.map((row) => row.hours)),
-  }));
+  const groups = groupedBy(rows, keyOf);
+  return [...groups.values()].map((group) => ({ ...group[0], hours: tripleSum(group.map((row) => row.hours)) }));
 };
 
 /** Rows of the same kind, stage and grade added up, in the order they first appear; hours. */
@@ -17,10 +14,7 @@ export const rowsTogether = (rows: readonly CarvingHoursRow[]): CarvingHoursRow[
 
 /** Hours of each grade over the given rows. */
 export const gradesTogether = (rows: readonly GradeHours[]): GradeHours[] =>
-  together(
-    rows.map(({ gradeId, hours }) => ({ gradeId, hours })),
-    (row) => row.gradeId,
-  );
+  together(rows, (row) => row.gradeId).map(({ gradeId, hours }) => ({ gradeId, hours }));
 
 /** Hours of the rows of the given kinds. */
 export const hoursOfKinds = (rows: readonly CarvingHoursRow[], kinds: readonly CarvingWorkKind[]): Triple =>

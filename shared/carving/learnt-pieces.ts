@@ -30,16 +30,29 @@ const groupKey = ({ use, timberId, size_mm }: PiecesToLearn): string =>
     use.isMirrored && !use.joinsLearning,
   ].join(' ');
 
+/** All pieces learnt on one curve; those of one ornament run along or stand alone, all of them alike. */
+interface LearningGroup {
+  readonly pieces: number;
+  readonly isRunning: boolean;
+}
+
+const sumOf = ({ pieces, isRunning }: LearningGroup, learning: Learning): number =>
+  learningSum(learningCurve(learning, isRunning), pieces);
+
 /**
  * Learning over all uses of an estimate, in their order: pieces of one group are counted on one curve, and its sum is shared by
  * pieces. Pieces are whole; answers are in multiples of the first piece's hours.
  */
 export function learntPieces(uses: readonly PiecesToLearn[], learning: Learning): LearntPieces[] {
-  const groups = new Map<string, number>();
-  for (const use of uses) groups.set(groupKey(use), (groups.get(groupKey(use)) ?? 0) + use.pieces);
-  return uses.map((use) => {
-    const group = groups.get(groupKey(use)) ?? 0;
-    if (group === 0) return { learnt: 0, group };
-    return { learnt: (learningSum(learningCurve(learning, use.isRunning), group) * use.pieces) / group, group };
+  const keys = uses.map(groupKey);
+  const groups = new Map<string, LearningGroup>();
+  uses.forEach((use, place) => {
+    const pieces = (groups.get(keys[place])?.pieces ?? 0) + use.pieces;
+    groups.set(keys[place], { pieces, isRunning: use.isRunning });
+  });
+  const sums = new Map([...groups].map(([key, group]) => [key, sumOf(group, learning)]));
+  return uses.map((use, place) => {
+    const group = groups.get(keys[place])?.pieces ?? 0;
+    return { learnt: group === 0 ? 0 : ((sums.get(keys[place]) ?? 0) * use.pieces) / group, group };
   });
 }

@@ -1,6 +1,7 @@
 import type { CarvingCard } from '#shared/carving/carving-card';
 import type { CarvingHoursRow, PatternHours } from '#shared/carving/carving-result';
 import type { CarvedUse } from '#shared/carving/carving-work';
+import { groupedBy } from '#shared/units/grouped-by';
 import { mapTriple } from '#shared/units/triple';
 
 // One drawing serves all ordinary uses of an ornament, at any size; each use marked for its own pattern needs one more.
@@ -11,9 +12,10 @@ const patternsOf = (uses: readonly CarvedUse[]): number => {
 
 /** Drawing and pattern of every repeated ornament that is used, in hours: once for each ornament, and once for each use that differs. */
 export function patternHours(uses: readonly CarvedUse[], card: CarvingCard): PatternHours[] {
+  const byOrnament = groupedBy(uses, ({ use }) => use.ornamentId);
   return card.ornaments.flatMap((ornament) => {
-    const own = uses.filter(({ use }) => use.ornamentId === ornament.id);
-    if (own.length === 0) return [];
+    const own = byOrnament.get(ornament.id);
+    if (!own) return [];
     const patterns = patternsOf(own);
     return [
       { ornamentId: ornament.id, patterns, hours: mapTriple(ornament.patternHours, (hours) => hours * patterns) },

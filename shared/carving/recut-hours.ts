@@ -2,6 +2,7 @@ import type { CarvingCard } from '#shared/carving/carving-card';
 import type { CarvingHoursRow, RecutHours, UseHours } from '#shared/carving/carving-result';
 import type { RecutZone } from '#shared/carving/carving-work';
 import { ornamentCarving } from '#shared/carving/hours-rows';
+import { groupedBy } from '#shared/units/grouped-by';
 import { mapTriple, type Triple } from '#shared/units/triple';
 import type { Reason } from '#shared/words/reason';
 
@@ -36,8 +37,9 @@ const byArea = (zone: RecutZone, card: CarvingCard): [Triple, Reason] => {
  * on it (a restored or bought-in base).
  */
 export function recutHours(zones: readonly RecutZone[], uses: readonly UseHours[], card: CarvingCard): RecutHours[] {
+  const byZone = groupedBy(uses, (use) => use.zoneId);
   return zones.map((zone) => {
-    const carved = ornamentCarving(uses.filter((use) => use.zoneId === zone.zoneId).flatMap((use) => use.rows));
+    const carved = ornamentCarving((byZone.get(zone.zoneId) ?? []).flatMap((use) => use.rows));
     const [hours, reason] = carved.likely > 0 ? byShare(zone, carved, card) : byArea(zone, card);
     return { zoneId: zone.zoneId, hours, reasons: [reason] };
   });
@@ -47,15 +49,19 @@ export function recutHours(zones: readonly RecutZone[], uses: readonly UseHours[
 export const recutRows = (recut: readonly RecutHours[], card: CarvingCard): CarvingHoursRow[] =>
   recut.map(({ hours }) => recutRow(hours, card));
 
+/** The zones recut, to be found by their id. */
+export type RecutZones = ReadonlyMap<string | null, readonly RecutZone[]>;
+export const recutZonesById = (zones: readonly RecutZone[]): RecutZones => groupedBy(zones, (zone) => zone.zoneId);
+
 /** Recutting one use brings with it, where its zone is recut; none for zones recut by area. */
-export function recutRowsOfUse(use: UseHours, zones: readonly RecutZone[], card: CarvingCard): CarvingHoursRow[] {
+export function recutRowsOfUse(use: UseHours, zones: RecutZones, card: CarvingCard): CarvingHoursRow[] {
+  const own = zones.get(use.zoneId);
+  if (!own) return [];
   const carved = ornamentCarving(use.rows);
-  return zones
-    .filter((zone) => zone.zoneId === use.zoneId)
-    .map((zone) =>
-      recutRow(
-        mapTriple(carved, (figure) => (figure * card.recutting[zone.manner].share_percent) / 100),
-        card,
-      ),
-    );
+  return own.map((zone) =>
+    recutRow(
+      mapTriple(carved, (figure) => (figure * card.recutting[zone.manner].share_percent) / 100),
+      card,
+    ),
+  );
 }

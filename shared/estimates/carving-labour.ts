@@ -1,10 +1,10 @@
 import type { CarvingHoursRow, CarvingResult, UseHours } from '#shared/carving/carving-result';
-import type { RecutZone } from '#shared/carving/carving-work';
 import { sharpeningRows } from '#shared/carving/hours-rows';
 import { patternRows } from '#shared/carving/pattern-hours';
-import { recutRowsOfUse } from '#shared/carving/recut-hours';
+import { recutRowsOfUse, type RecutZones } from '#shared/carving/recut-hours';
 import type { PriceLabour } from '#shared/estimates/price/price-input';
 import type { RateCard } from '#shared/rate-cards/rate-card';
+import { groupedBy } from '#shared/units/grouped-by';
 
 /** Which member a use or a zone belongs to. */
 export type MemberOf = (id: string) => string | null;
@@ -14,7 +14,7 @@ const labourOf = (rows: readonly CarvingHoursRow[], memberId: string | null): Pr
 
 interface CarvedBy {
   readonly result: CarvingResult;
-  readonly recut: readonly RecutZone[];
+  readonly recut: RecutZones;
   readonly card: RateCard;
   readonly memberOf: MemberOf;
 }
@@ -39,8 +39,9 @@ function recutByArea({ result, card, memberOf }: CarvedBy): PriceLabour[] {
 
 /** Drawing and pattern are charged where the ornament is used first. */
 function patternLabour({ result, card, memberOf }: CarvedBy): PriceLabour[] {
+  const byOrnament = groupedBy(result.uses, (use) => use.ornamentId);
   return result.patterns.flatMap((pattern) => {
-    const first = result.uses.find((use) => use.ornamentId === pattern.ornamentId);
+    const [first] = byOrnament.get(pattern.ornamentId) ?? [];
     return labourOf(patternRows([pattern], card.carving), first ? memberOf(first.useId) : null);
   });
 }

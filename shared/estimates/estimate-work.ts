@@ -1,8 +1,9 @@
-import { lotWorks, type LotWork } from '#shared/buildups/lot-works';
+import { lotsOfZones, type LotWork } from '#shared/buildups/lot-works';
 import { materialsBought, type MaterialBought } from '#shared/buildups/materials-bought';
 import { carvingHours } from '#shared/carving/carving-hours';
 import type { CarvingResult } from '#shared/carving/carving-result';
 import type { RecutZone } from '#shared/carving/carving-work';
+import { recutZonesById } from '#shared/carving/recut-hours';
 import { carvingLabour } from '#shared/estimates/carving-labour';
 import type { Draft } from '#shared/estimates/draft';
 import { gildingLabour } from '#shared/estimates/gilding-labour';
@@ -34,11 +35,11 @@ const recutZones = (members: readonly MeasuredMember[]): RecutZone[] =>
     ),
   );
 
-function carvingOf(members: readonly MeasuredMember[], card: RateCard): CarvingResult {
+function carvingOf(members: readonly MeasuredMember[], recut: readonly RecutZone[], card: RateCard): CarvingResult {
   const uses = members.flatMap(({ member }) =>
     member.ornaments.map((use) => ({ use, members: member.count, timberId: member.timberId })),
   );
-  return carvingHours({ uses, recut: recutZones(members) }, card.carving);
+  return carvingHours({ uses, recut }, card.carving);
 }
 
 function zonesOf(
@@ -74,12 +75,10 @@ function memberOf(members: readonly MeasuredMember[]): (id: string) => string | 
  */
 export function estimateWork(draft: Draft, card: RateCard): EstimateWork {
   const members = draft.members.map((member) => measuredMember(member, card.measure));
-  const carving = carvingOf(members, card);
+  const recut = recutZones(members);
+  const carving = carvingOf(members, recut, card);
   const zones = zonesOf(members, carving, { draft, card });
-  const lots = lotWorks(
-    zones.map((zone) => zone.facts),
-    card.buildUps,
-  );
+  const lots = lotsOfZones(zones, card.buildUps);
   const leaf = leafTotals(
     zones.flatMap((zone) => (zone.leaf ? [zone.leaf] : [])),
     card.leaf,
@@ -88,7 +87,7 @@ export function estimateWork(draft: Draft, card: RateCard): EstimateWork {
     zones.flatMap((zone) => zone.materials.needs),
     card.buildUps,
   );
-  const carved = { result: carving, recut: recutZones(members), card, memberOf: memberOf(members) };
+  const carved = { result: carving, recut: recutZonesById(recut), card, memberOf: memberOf(members) };
   return {
     members,
     zones,

@@ -4,6 +4,7 @@ import { stepWorkKind } from '#shared/estimates/step-work-kind';
 import type { WorkedZone } from '#shared/estimates/worked-zone';
 import type { LeafCard } from '#shared/leaf/leaf-card';
 import type { LeafTotal } from '#shared/leaf/leaf-totals';
+import { groupedBy } from '#shared/units/grouped-by';
 
 function leafShares(productId: string, zones: readonly WorkedZone[]): GoodsShare[] {
   return zones.flatMap(({ leaf, memberId }) =>
@@ -11,16 +12,18 @@ function leafShares(productId: string, zones: readonly WorkedZone[]): GoodsShare
   );
 }
 
-function materialShares(materialId: string, zones: readonly WorkedZone[]): GoodsShare[] {
-  return zones.flatMap(({ materials, handsOn, memberId }) =>
-    materials.needs
-      .filter((need) => need.materialId === materialId)
-      .map((need) => {
-        const step = handsOn.steps.find((one) => one.stepId === need.stepId);
-        return { memberId, kind: step ? stepWorkKind[step.kind] : ('ground' as const), weight: need.quantity };
-      }),
-  );
+interface MaterialShare extends GoodsShare {
+  readonly materialId: string;
 }
+
+function materialShares({ materials, handsOn, memberId }: WorkedZone): MaterialShare[] {
+  const kinds = new Map(handsOn.steps.map((step) => [step.stepId, stepWorkKind[step.kind]]));
+  return materials.needs.map(({ materialId, stepId, quantity }) => ({
+    ...{ materialId, memberId, kind: kinds.get(stepId) ?? 'ground', weight: quantity },
+  }));
+}
+
+const shareOnly = ({ memberId, kind, weight }: GoodsShare): GoodsShare => ({ memberId, kind, weight });
 
 /** What is bought for the whole job, and the zones it goes to. */
 export interface Bought {
@@ -33,19 +36,22 @@ const leafName = (productId: string, card: LeafCard): string =>
   card.products.find((product) => product.id === productId)?.name ?? productId;
 
 /** Leaf and materials bought for the whole job, each with the members that use it. */
-export const goodsUsed = ({ leaf, materials, zones }: Bought, card: LeafCard): PriceGoods[] => [
-  ...leaf.map((total): PriceGoods => ({
-    head: 'leaf',
-    itemId: total.productId,
-    name: leafName(total.productId, card),
-    cost: total.price,
-    shares: leafShares(total.productId, zones),
-  })),
-  ...materials.map((bought): PriceGoods => ({
-    head: 'materials',
-    itemId: bought.materialId,
-    name: bought.name,
-    cost: bought.cost,
-    shares: materialShares(bought.materialId, zones),
-  })),
-];
+export function goodsUsed({ leaf, materials, zones }: Bought, card: LeafCard): PriceGoods[] {
+  const ofMaterial = groupedBy(zones.flatMap(materialShares), (share) => share.materialId);
+  return [
+    ...leaf.map((total): PriceGoods => ({
+      head: 'leaf',
+      itemId: total.productId,
+      name: leafName(total.productId, card),
+      cost: total.price,
+      shares: leafShares(total.productId, zones),
+    })),
+    ...materials.map((bought): PriceGoods => ({
+      head: 'materials',
+      itemId: bought.materialId,
+      name: bought.name,
+      cost: bought.cost,
+      shares: (ofMaterial.get(bought.materialId) ?? []).map(shareOnly),
+    })),
+  ];
+}

@@ -1,6 +1,7 @@
 import { groundThickness } from '#shared/buildups/ground-thickness';
 import { recipeBatches } from '#shared/buildups/recipe-batches';
 import { sectionStrip } from '#shared/buildups/section-strip';
+import type { UseHours } from '#shared/carving/carving-result';
 import { rowsTogether } from '#shared/carving/hours-rows';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import { dryFigures } from '#shared/estimates/dry-figures';
@@ -23,6 +24,7 @@ import { bookletsFor } from '#shared/leaf/booklets-for';
 import { layPlanBands } from '#shared/leaf/lay-plan-bands';
 import type { LeafProduct } from '#shared/leaf/leaf-product';
 import type { RateCard } from '#shared/rate-cards/rate-card';
+import { groupedBy } from '#shared/units/grouped-by';
 import { tripleSum } from '#shared/units/triple-sum';
 
 const nameOf = (items: readonly { readonly id: string; readonly name: string }[], id: string): string =>
@@ -30,10 +32,14 @@ const nameOf = (items: readonly { readonly id: string; readonly name: string }[]
 
 const sum = (figures: readonly number[]): number => figures.reduce((total, figure) => total + figure, 0);
 
-function memberFigures(measured: MeasuredMember, work: EstimateWork, card: RateCard): MemberFigures {
+/** What was worked of one member: its zones and its ornaments. */
+interface MemberWork {
+  readonly zones: readonly WorkedZone[];
+  readonly uses: readonly UseHours[];
+}
+
+function memberFigures(measured: MeasuredMember, { zones, uses }: MemberWork, card: RateCard): MemberFigures {
   const { member, surface, areas } = measured;
-  const uses = work.carving.uses.filter((use) => member.ornaments.some((own) => own.id === use.useId));
-  const zones = work.zones.filter((zone) => zone.memberId === member.id);
   return {
     memberId: member.id,
     timber: nameOf(card.carving.timbers, member.timberId),
@@ -88,12 +94,27 @@ function zoneFigures(worked: WorkedZone, card: RateCard): ZoneFigures {
   };
 }
 
-function useFigures(work: EstimateWork, card: RateCard): UseFigures[] {
-  const items = [...card.carving.ornaments, ...card.carving.items];
-  return work.carving.uses.map(({ useId, ornamentId, quantity, fit, factor, carving, reasons }) => ({
+type MemberOfUse = ReadonlyMap<string, string>;
+
+/** The member that carries each ornament. */
+const memberOfUse = ({ members }: EstimateWork): MemberOfUse =>
+  new Map(members.flatMap(({ member }) => member.ornaments.map((own) => [own.id, member.id] as const)));
+
+function membersFigures(work: EstimateWork, memberOf: MemberOfUse, card: RateCard): MemberFigures[] {
+  const zones = groupedBy(work.zones, (zone) => zone.memberId);
+  const uses = groupedBy(work.carving.uses, ({ useId }) => memberOf.get(useId) ?? '');
+  return work.members.map((measured) => {
+    const { id } = measured.member;
+    return memberFigures(measured, { zones: zones.get(id) ?? [], uses: uses.get(id) ?? [] }, card);
+  });
+}
+
+function useFigures({ carving: { uses } }: EstimateWork, memberOf: MemberOfUse, card: RateCard): UseFigures[] {
+  const names = new Map([...card.carving.items, ...card.carving.ornaments].map(({ id, name }) => [id, name]));
+  return uses.map(({ useId, ornamentId, quantity, fit, factor, carving, reasons }) => ({
     ...{ useId, quantity, fit, factor, carving, reasons },
-    memberId: work.members.find(({ member }) => member.ornaments.some((own) => own.id === useId))?.member.id ?? '',
-    ornament: nameOf(items, ornamentId),
+    memberId: memberOf.get(useId) ?? '',
+    ornament: names.get(ornamentId) ?? ornamentId,
   }));
 }
 
@@ -167,13 +188,14 @@ const tallyOf = (work: EstimateWork, card: RateCard, members: readonly MemberFig
 /** The figures of an estimate's work, without a word of money: areas mm², hours decimal, leaves not rounded, booklets whole. */
 export function workFigures(work: EstimateWork, settings: EstimateSettings, card: RateCard): WorkFigures {
   const { dry, findings } = dryFigures(work, settings, card);
-  const members = work.members.map((measured) => memberFigures(measured, work, card));
+  const memberOf = memberOfUse(work);
+  const members = membersFigures(work, memberOf, card);
   return {
     calculatorVersion,
     tally: { ...tallyOf(work, card, members), workingDays: dry.elapsed_workingDays, weeks: dry.elapsed_weeks },
     members,
     zones: work.zones.map((zone) => zoneFigures(zone, card)),
-    uses: useFigures(work, card),
+    uses: useFigures(work, memberOf, card),
     carving: carvingFigures(work, card),
     grades: gradeFigures(work, card),
     leaf: leafFigures(work, card),

@@ -5,6 +5,7 @@ import { type WorkKind, workKinds } from '#shared/estimates/price/work-kind';
 import { D } from '#shared/money/decimal';
 import { minorOf } from '#shared/money/minor-of';
 import { splitByLargestRemainder } from '#shared/money/split-by-largest-remainder';
+import { groupedBy } from '#shared/units/grouped-by';
 
 interface Place {
   readonly memberId: string | null;
@@ -55,11 +56,13 @@ function gathered(input: PriceInput): Gathered[] {
 
 /** Members as they first appear, what belongs to the job as a whole last; within a member in the order of the work. */
 function inOrder(places: readonly Gathered[]): Gathered[] {
-  const members = [...new Set(places.map((place) => place.memberId))];
-  const rank = (place: Gathered) => (place.memberId === null ? members.length : members.indexOf(place.memberId));
-  return [...places].sort(
-    (one, other) => rank(one) - rank(other) || workKinds.indexOf(one.kind) - workKinds.indexOf(other.kind),
+  const general: readonly Gathered[] = places.filter((place) => place.memberId === null);
+  const members = groupedBy(
+    places.filter((place) => place.memberId !== null),
+    (place) => place.memberId,
   );
+  const byKind = (one: Gathered, other: Gathered) => workKinds.indexOf(one.kind) - workKinds.indexOf(other.kind);
+  return [...members.values(), general].flatMap((own) => own.toSorted(byKind));
 }
 
 /** One line for each kind of work of each member, with what stands behind it; lines with nothing behind them are left out. */
