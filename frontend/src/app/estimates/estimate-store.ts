@@ -13,6 +13,7 @@ import { DraftStore } from './draft/draft-store';
 import type { Edit } from './draft/edit';
 import type { ReadEstimate, ReaderSettings } from './draft/read-estimate';
 import type { Undone } from './draft/undo-history';
+import { UnfinishedEntries } from './draft/unfinished-entries';
 import { EstimateClient } from './estimate-client';
 import { LiveFigures } from './figures/live-figures';
 import { Presence, type PresenceAnswer } from './presence';
@@ -33,6 +34,7 @@ export class EstimateStore {
   private readonly notices = inject(Notices);
   private readonly rows = inject(DraftStore);
   private readonly saving = inject(DraftSaving);
+  private readonly unfinished = inject(UnfinishedEntries);
   private readonly live = inject(LiveFigures);
   private readonly presence = inject(Presence);
   private readonly opened = signal<OpenEstimate | undefined>(undefined);
@@ -150,9 +152,9 @@ export class EstimateStore {
     if (settings && id) this.apply([{ kind: 'settings', id, content: { ...settings, ...change } }], 'settings');
   }
 
-  /** Takes the last step back; gives the ids it touched. */
+  /** Takes the last step back, or first what could not be kept; gives the ids it touched. */
   undo(): readonly string[] {
-    return this.told(this.rows.undo());
+    return this.unfinished.forgetAll() ?? this.told(this.rows.undo());
   }
 
   redo(): readonly string[] {

@@ -24,6 +24,17 @@ const starts: Readonly<Record<PlanForm, (sides_mm: readonly number[]) => Mouldin
   imports: [ChoiceEntry, EntryAt, RowsEditor],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './plan-editor.html',
+  styles: `
+    .pair {
+      display: grid;
+      gap: 16px 32px;
+      grid-template-columns: repeat(auto-fit, minmax(min(100%, 260px), 1fr));
+    }
+
+    .complaint {
+      color: var(--wrong);
+    }
+  `,
 })
 export class PlanEditor {
   readonly form = input.required<AnyDocumentForm>();

@@ -38,9 +38,7 @@ export function enteredDocument(root: AbstractControl, writing: Writing): { valu
     const inner = (key: string | number, child: AbstractControl) => read(child, path ? `${path}.${key}` : String(key));
     if (control instanceof FormArray) return control.controls.map((child, index) => inner(index, child));
     if (control instanceof FormGroup)
-      return Object.fromEntries(
-        Object.entries(control.controls).map(([key, child]) => [key, inner(key, child)]),
-      );
+      return Object.fromEntries(Object.entries(control.controls).map(([key, child]) => [key, inner(key, child)]));
     const entry: unknown = control.value;
     if (!isTypedMeasure(entry)) return entry;
     const text = rememberedText(entry, writing);

@@ -1,14 +1,7 @@
 import { DestroyRef, type Signal, computed, inject, signal } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
-import type {
-  FormControl} from '@angular/forms';
-import {
-  type AbstractControl,
-  FormArray,
-  FormGroup,
-  ValueChangeEvent,
-  TouchedChangeEvent,
-} from '@angular/forms';
+import type { FormControl } from '@angular/forms';
+import { type AbstractControl, FormArray, FormGroup, ValueChangeEvent, TouchedChangeEvent } from '@angular/forms';
 import { Subject, filter, switchMap } from 'rxjs';
 import type * as z from 'zod';
 import { complaintsOf } from '#shared/problems/complaints-of';
@@ -23,9 +16,6 @@ interface Remark {
   readonly text: string;
   readonly isMissing: boolean;
 }
-
-/** A document of lists and alternatives, with the texts of its lengths beside it. */
-type Document = object & { readonly typed?: TypedTexts };
 
 /**
  * Ties a schema to a form whose entries follow the document itself: lists grow and shrink, alternatives replace each other. Lengths and
@@ -64,9 +54,9 @@ export class DocumentForm<S extends z.ZodType> {
     events.pipe(filter((event) => event instanceof TouchedChangeEvent)).subscribe(() => this.turn());
   }
 
-  /** Begins again with another document, or with the same one as somebody else made it. */
-  reset(document: Document, isDisabled = false): void {
-    const { typed, ...value } = document;
+  /** Begins again with another document, or with the same one as somebody else made it; `typed` in it holds the texts of its lengths. */
+  reset(document: object, isDisabled = false): void {
+    const { typed, ...value } = document as { readonly typed?: TypedTexts };
     this.hasTyped.set(typed !== undefined);
     const root = documentControls(value, typed ?? {}, { writing: this.writing() });
     if (isDisabled) root.disable({ emitEvent: false });

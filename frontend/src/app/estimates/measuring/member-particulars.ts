@@ -9,14 +9,29 @@ import type { MemberForm } from '../members/member-form';
   imports: [EntryAt],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <div class="fields">
-      <app-entry-at way="line" i18n-label label="Name" path="name" [form]="form()" />
+    <div class="fields particulars">
+      <app-entry-at class="name" way="line" i18n-label label="Name" path="name" [form]="form()" />
       <app-entry-at way="number" i18n-label label="How many alike" path="count" [form]="form()" />
       <app-entry-at way="choice" i18n-label label="Timber" path="timberId" [choices]="timbers()" [form]="form()" />
       @if (pieces().length > 1) {
         <app-entry-at way="choice" i18n-label label="Piece" path="pieceId" [choices]="pieces()" [form]="form()" />
       }
     </div>
+  `,
+  styles: `
+    .particulars {
+      grid-template-columns: repeat(auto-fill, minmax(min(100%, 124px), 1fr));
+    }
+
+    .name {
+      grid-column: span 2;
+    }
+
+    @media (max-width: 400px) {
+      .name {
+        grid-column: auto;
+      }
+    }
   `,
 })
 export class MemberParticulars {

@@ -82,7 +82,7 @@ export class SurfaceFigures {
   constructor() {
     // Where there is room beside it, the surface of the member one comes to explains itself unasked.
     effect(() => {
-      const [developed, hasRoom] = [this.developed(), matchMedia('(min-width: 901px)').matches];
+      const [developed, hasRoom] = [this.developed(), matchMedia('(min-width: 1181px)').matches];
       untracked(() => {
         const shown = this.explanation.current();
         const isOfAnother = !shown || (shown.id.startsWith('surface ') && shown.id !== developed?.id);

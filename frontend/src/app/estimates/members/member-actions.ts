@@ -32,16 +32,21 @@ export class MemberActions {
     return id;
   }
 
-  /** A new member of a shape at the end of a piece; in an empty estimate a first piece comes with it. */
-  add(shape: Shape, name: string, pieceId = this.selection.member()?.pieceId ?? this.store.pieces().at(0)?.id): void {
-    const [id, home] = [newId(), pieceId ?? newId()];
-    const piece: Edit[] = pieceId
-      ? []
-      : [{ kind: 'piece', id: home, content: { name: $localize`Base`, place: 0, note: '' } }];
-    const place = placeBetween(this.of(home).at(-1), undefined);
-    const timberId = this.selection.member()?.timberId ?? this.store.card()?.carving.timbers.at(0)?.id ?? '';
-    const content = newMember({ pieceId: home, place, timberId, name, shape });
-    this.store.apply([...piece, { kind: 'member', id, content }]);
+  /** Where the next member goes: the end of the piece one is at, of the timber one is at. */
+  end(): Pick<MemberContent, 'pieceId' | 'place' | 'timberId'> {
+    const present = this.selection.member();
+    const pieceId = present?.pieceId ?? this.store.pieces().at(0)?.id ?? newId();
+    const timberId = present?.timberId ?? this.store.card()?.carving.timbers.at(0)?.id ?? '';
+    return { pieceId, timberId, place: placeBetween(this.of(pieceId).at(-1), undefined) };
+  }
+
+  /** A new member of a shape; in an empty estimate a first piece comes with it. */
+  add(shape: Shape, name: string): void {
+    const [id, end] = [newId(), this.end()];
+    const first: Edit = { kind: 'piece', id: end.pieceId, content: { name: $localize`Base`, place: 0, note: '' } };
+    const isHomeless = this.store.pieces().every((piece) => piece.id !== end.pieceId);
+    const member: Edit = { kind: 'member', id, content: newMember({ ...end, name, shape }) };
+    this.store.apply(isHomeless ? [first, member] : [member]);
     this.selection.select(id);
   }
 

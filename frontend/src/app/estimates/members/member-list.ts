@@ -77,6 +77,12 @@ export class MemberList {
     if (chosen) this.actions.add(chosen.shape, chosen.name);
   }
 
+  protected async paste(): Promise<void> {
+    const { askForPastedMembers } = await import('./paste-dialog');
+    const contents = await askForPastedMembers(this.injector, this.actions.end());
+    if (contents) this.actions.insert(contents);
+  }
+
   protected async rename(piece: Piece): Promise<void> {
     const { askForName } = await import('./name-dialog');
     const name = await askForName(this.injector, $localize`Name of the piece`, piece.name);

@@ -25,7 +25,8 @@ export class LengthField extends TypedEntry<TypedLength> {
   readonly signed = input(false, { transform: booleanAttribute });
   private readonly known_mm = signal<number | undefined>(undefined);
 
-  readonly unitText = computed(() => this.formats.lengthUnit());
+  /** Behind a bare figure; a text that names its own unit needs none. */
+  readonly unitText = computed(() => (/[a-z'"′″’”]/i.test(this.text()) ? '' : this.formats.lengthUnit()));
   override readonly otherReading = computed(() => {
     const known = this.known_mm();
     return known === undefined ? '' : this.formats.otherLength(known);

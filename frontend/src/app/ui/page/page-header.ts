@@ -30,6 +30,7 @@ import { ChangeDetectionStrategy, Component, input } from '@angular/core';
       display: flex;
       flex-wrap: wrap;
       gap: 4px 16px;
+      flex: 1 1 300px;
       align-items: baseline;
       min-width: 0;
     }

@@ -1,0 +1,245 @@
+import { type ComponentFixture, TestBed } from '@angular/core/testing';
+import { ActivatedRoute, convertToParamMap, provideRouter } from '@angular/router';
+import { BehaviorSubject, map } from 'rxjs';
+import type { Role } from '#shared/actor/role';
+import { EstimateServer, ids, workspaceOn } from '../../test/estimate-server';
+import { signIn, words } from '../../test/sign-in';
+import { EstimateStore } from './estimate-store';
+import { MeasurePage } from './measure-page';
+
+describe('MeasurePage', () => {
+  let server: EstimateServer;
+  let store: EstimateStore;
+  let fixture: ComponentFixture<MeasurePage>;
+  let member: BehaviorSubject<string>;
+
+  const element = () => fixture.nativeElement as HTMLElement;
+  const settle = async () => {
+    await jest.advanceTimersByTimeAsync(1);
+    fixture.detectChanges();
+  };
+  const field = (label: string): HTMLInputElement => {
+    const found = [...element().querySelectorAll('app-field')].find(
+      (one) => one.querySelector('label')?.textContent?.trim() === label,
+    );
+    return found?.querySelector('input, select, textarea') as HTMLInputElement;
+  };
+  const complaints = () => [...element().querySelectorAll('[role="alert"]')].map((one) => one.textContent?.trim());
+  const button = (text: string) =>
+    [...element().querySelectorAll('button')].find((one) => one.textContent?.trim() === text) as HTMLButtonElement;
+
+  async function type(label: string, text: string): Promise<void> {
+    const entry = field(label);
+    entry.value = text;
+    entry.dispatchEvent(new Event('input'));
+    await settle();
+  }
+
+  async function choose(label: string, text: string): Promise<void> {
+    const entry = field(label) as unknown as HTMLSelectElement;
+    entry.selectedIndex = [...entry.options].findIndex((option) => option.textContent?.trim() === text);
+    entry.dispatchEvent(new Event('change'));
+    await settle();
+  }
+
+  const click = async (text: string) => {
+    button(text).click();
+    await settle();
+  };
+  const show = async (id: string) => {
+    member.next(id);
+    await settle();
+  };
+  const shape = (id: string) => store.members().find((one) => one.id === id)?.shape;
+  const surface = () =>
+    element()
+      .querySelector('app-surface-figures dd')
+      ?.textContent?.trim()
+      .replace(/\u00a0/g, ' ');
+
+  async function open(roles: readonly Role[] = ['estimator'], settings: Parameters<typeof signIn>[1] = {}) {
+    member = new BehaviorSubject<string>(ids.edge);
+    const queryParamMap = member.pipe(map((id) => convertToParamMap({ member: id })));
+    TestBed.configureTestingModule({
+      providers: [
+        words,
+        provideRouter([]),
+        { provide: ActivatedRoute, useValue: { queryParamMap } },
+        ...workspaceOn(server),
+      ],
+    });
+    signIn(roles, settings);
+    store = TestBed.inject(EstimateStore);
+    void store.open({ jobId: ids.job, estimateId: ids.estimate });
+    await jest.advanceTimersByTimeAsync(1);
+    fixture = TestBed.createComponent(MeasurePage);
+    await settle();
+    await settle();
+  }
+
+  beforeEach(() => {
+    jest.useFakeTimers();
+    server = new EstimateServer();
+  });
+  afterEach(() => jest.useRealTimers());
+
+  it('works the surface while a length is typed, and sends it as it was written', async () => {
+    await open();
+    expect(surface()).toBe('600 cm²');
+    await type('Length', '2 m');
+    expect(surface()).toBe('1,200 cm²');
+    await jest.advanceTimersByTimeAsync(700);
+    expect(server.member(ids.edge)).toMatchObject({
+      shape: { length_mm: 2000 },
+      typed: { 'shape.length_mm': '2 m' },
+    });
+    expect(field('Length').value).toBe('2 m');
+  });
+
+  it('reads inches and fractions', async () => {
+    await open(['estimator'], { lengthUnit: 'in' });
+    await type('Length', '33 7/8');
+    // 33.875 in of 25.4 mm.
+    expect(shape(ids.edge)).toMatchObject({ length_mm: 860.425 });
+  });
+
+  it('says beside its field what cannot be, and keeps the last good figures', async () => {
+    await open();
+    await type('Length', '2000 mm');
+    await type('Length', '2000 m');
+    expect(complaints()).toEqual(['Must be less than 100000.']);
+    expect(surface()).toBe('1,200 cm²');
+  });
+
+  it('says what shape cannot be at the entry that makes it so', async () => {
+    server.members = [
+      {
+        id: ids.edge,
+        version: 1,
+        content: {
+          ...server.members[0].content,
+          shape: { kind: 'ring', outerDiameter_mm: 300, innerDiameter_mm: 200 },
+        },
+      },
+    ];
+    await open();
+    await type('Inner diameter', '300');
+    expect(complaints()).toEqual(['The inner diameter must be smaller than the outer one.']);
+    // π/4 × (300² − 200²) mm² is 392.7 cm².
+    expect(surface()).toBe('393 cm²');
+  });
+
+  it('keeps half a length while one looks at another member', async () => {
+    await open();
+    await type('Length', '12 foo');
+    await show(ids.leg);
+    expect(field('Length').value).toBe('700');
+    await show(ids.edge);
+    expect(field('Length').value).toBe('12 foo');
+  });
+
+  it('shows what an undo brings back, and half a length is what it takes back first', async () => {
+    await open();
+    await type('Length', '1500');
+    await type('Length', '15 foo');
+    store.undo();
+    await settle();
+    expect(field('Length').value).toBe('1500');
+    store.undo();
+    await settle();
+    expect(field('Length').value).toBe('1000');
+  });
+
+  it('shows what somebody else made of the member', async () => {
+    await open();
+    server.changeElsewhere(ids.edge, { name: 'Cornice' });
+    await store.reload();
+    await settle();
+    expect(field('Name').value).toBe('Cornice');
+  });
+
+  it('puts another shape in the place of one, lengths of the same name coming along', async () => {
+    await open();
+    await click('Another shape');
+    await click('Ellipse');
+    expect(shape(ids.edge)).toEqual({ kind: 'ellipse', length_mm: 1000, height_mm: 60 });
+  });
+
+  it('builds a profile member by member', async () => {
+    await open();
+    await click('Another shape');
+    await click('Moulding');
+    const profile = () => {
+      const made = shape(ids.edge);
+      return made && 'profile' in made ? made.profile.map(({ element: name }) => name) : [];
+    };
+    expect(profile()).toEqual(['fillet', 'ovolo', 'fillet']);
+    await click('Add on top');
+    expect(profile()).toEqual(['fillet', 'ovolo', 'fillet', 'ovolo']);
+    const [top] = [...element().querySelectorAll<HTMLElement>('app-profile-editor tbody tr')];
+    top.dispatchEvent(new KeyboardEvent('keydown', { key: 'ArrowDown', altKey: true, bubbles: true }));
+    await settle();
+    expect(profile()).toEqual(['fillet', 'ovolo', 'ovolo', 'fillet']);
+  });
+
+  it('takes a zone by parts of the profile', async () => {
+    await open();
+    await click('Another shape');
+    await click('Moulding');
+    const parts = [...element().querySelectorAll<HTMLInputElement>('app-zone-list input[type="radio"]')][1];
+    parts.click();
+    await settle();
+    const ovolo = [...element().querySelectorAll<HTMLInputElement>('app-part-picker input')][1];
+    ovolo.click();
+    await settle();
+    expect(store.members()[0].zones[0].take).toEqual({ way: 'parts', parts: ['ovolo-1'] });
+  });
+
+  it('gives a new zone what the others leave', async () => {
+    await open();
+    await type('Share of the surface', '70');
+    await click('Add a zone');
+    expect(store.members()[0].zones.map(({ take }) => take)).toEqual([
+      { way: 'share', share_percent: 70 },
+      { way: 'share', share_percent: 30 },
+    ]);
+  });
+
+  it('cuts openings out of each', async () => {
+    await open();
+    await click('Add an opening');
+    await type('Diameter', '50');
+    await type('How many in each', '4');
+    // 4 × π/4 × 5² cm² is 78.5 cm² of 600.
+    expect(store.figures()?.members[0].plan_mm2).toBeCloseTo(60_000 - Math.PI * 2500, 6);
+  });
+
+  it('asks how a measured area is known', async () => {
+    await open();
+    await click('Another shape');
+    await click('Measured area');
+    await type('Area of one', '0.12 m²');
+    const note = field('How it was measured');
+    note.dispatchEvent(new Event('blur'));
+    await settle();
+    expect(complaints()).toEqual(['Please fill this in.']);
+    note.value = 'foil pressed on and weighed';
+    note.dispatchEvent(new Event('input'));
+    await settle();
+    expect(shape(ids.edge)).toMatchObject({ kind: 'measured', area_mm2: 120_000 });
+  });
+
+  it('chooses timber from the card', async () => {
+    await open();
+    await choose('Timber', 'Walnut');
+    expect(store.members()[0].timberId).toBe('walnut');
+  });
+
+  it('shows the bench everything and lets it change nothing', async () => {
+    server.isPriced = false;
+    await open(['bench']);
+    expect(field('Length').disabled).toBe(true);
+    expect(button('Another shape')).toBeUndefined();
+    expect(element().textContent).not.toContain('€');
+  });
+});

@@ -1,0 +1,45 @@
+import type { ProfileElement } from '#shared/measure/profile-element';
+import { shapeSchema } from '#shared/measure/shape-schema';
+import { type ShapeKind, shapeKinds } from '#shared/measure/shape';
+import { shapeDefaults } from '#shared/measure/shape-defaults';
+import { changedElement } from './changed-element';
+import { changedShape } from './changed-shape';
+
+const pairs = shapeKinds.flatMap((from) => shapeKinds.map((to): [ShapeKind, ShapeKind] => [from, to]));
+
+describe('Another shape in the place of one', () => {
+  it('brings along the lengths that bear the same name', () => {
+    const before = { kind: 'rectangle', length_mm: 1234, height_mm: 56 } as const;
+    expect(changedShape(before, 'ellipse')).toEqual({ kind: 'ellipse', length_mm: 1234, height_mm: 56 });
+  });
+
+  it('brings a profile along', () => {
+    const moulding = shapeDefaults('moulding');
+    expect(changedShape(moulding, 'turned')).toMatchObject({ profile: 'profile' in moulding ? moulding.profile : [] });
+  });
+
+  it.each(pairs)('makes of a %s a %s that has every entry of its kind', (from, to) => {
+    const made = changedShape(shapeDefaults(from), to);
+    const parsed = shapeSchema.safeParse('note' in made ? { ...made, note: 'by tape' } : made);
+    const shapeOfEntries = parsed.error?.issues.filter(({ code }) => code !== 'custom') ?? [];
+    expect(shapeOfEntries).toEqual([]);
+  });
+});
+
+describe('Another element in the place of one', () => {
+  const ovolo: ProfileElement = { id: 'e', element: 'ovolo', height_mm: 20, projection_mm: 15, going: 'in' };
+
+  it('rises as high and reaches as far, and zones still know it', () => {
+    expect(changedElement(ovolo, 'cavetto')).toEqual({ ...ovolo, element: 'cavetto' });
+    expect(changedElement(ovolo, 'line')).toEqual({ id: 'e', element: 'line', across_mm: -15, up_mm: 20 });
+  });
+
+  it('comes back from a drawn line as it was', () => {
+    expect(changedElement(changedElement(ovolo, 'line'), 'ovolo')).toEqual(ovolo);
+  });
+
+  it('is a scotia no deeper than it is high', () => {
+    const flat: ProfileElement = { ...ovolo, height_mm: 10, projection_mm: 30 };
+    expect(changedElement(flat, 'scotia')).toMatchObject({ height_mm: 10, projection_mm: 10 });
+  });
+});
