@@ -43,7 +43,7 @@ const letter: Letter = {
 const post = async (changed: Partial<Letter>) => {
   await database.transaction(() => mailbox.post(null, { ...letter, ...changed }));
   await tasks.runDue();
-  return (await catcher.mails())[0]!;
+  return (await catcher.mails())[0];
 };
 
 test('a mail arrives with its letters intact', async () => {
