@@ -54,8 +54,7 @@ const subjectsWithThree = `SELECT DISTINCT a.subject_id AS id FROM search_words 
 const subjectsWithOne = `SELECT DISTINCT subject_id AS id FROM search_words
   WHERE workshop_id = :workshopId AND kind = :kind AND word LIKE :first LIMIT :limit`;
 
-const oneBeyondFew = `${subjectsWithOne} OFFSET :few`;
-const oneBeyondFewWithThree = `${subjectsWithThree} OFFSET :few`;
+const subjectsCounted = `SELECT COUNT(*) AS subjects FROM (${subjectsWithOne}) found`;
 
 const pattern = (beginning: string): string => `${beginning}%`;
 
@@ -92,12 +91,13 @@ export class SearchWords {
     const rare: string[][] = [];
     const common: string[] = [];
     for (const word of words) {
-      if (await this.isCommon(workshopId, [word])) common.push(word);
+      if (await this.isCommon(workshopId, word)) common.push(word);
       else rare.push(await this.subjectsWith(workshopId, [word]));
     }
     if (rare.length > 0) return narrowing(inEvery(rare), common);
-    if (common.length === 1 || (await this.isCommon(workshopId, common))) return narrowing(undefined, common);
-    return narrowing(await this.subjectsWith(workshopId, common), common.slice(joinedAtMost));
+    if (common.length === 1) return narrowing(undefined, common);
+    const together = await this.subjectsWith(workshopId, common);
+    return together.length > fewAtMost ? narrowing(undefined, common) : narrowing(together, common.slice(joinedAtMost));
   }
 
   /** The condition on rows that a narrowing amounts to, and the values it names. */
@@ -126,26 +126,22 @@ export class SearchWords {
     await this.table.bulkCreate(rows);
   }
 
-  /** Whether more than a few subjects have words with these beginnings; counted where they lie, so that no list of them travels. */
-  private async isCommon(workshopId: string, beginnings: readonly string[]): Promise<boolean> {
-    const values = this.asked(workshopId, beginnings, 1);
-    const rows = await this.database.select(beginnings.length === 1 ? oneBeyondFew : oneBeyondFewWithThree, values);
-    return rows.length > 0;
+  /** Whether more than a few subjects have a word with this beginning; counted where they lie, so that no list of them travels. */
+  private async isCommon(workshopId: string, beginning: string): Promise<boolean> {
+    const values = { workshopId, kind: this.kind, first: pattern(beginning), limit: fewAtMost + 1 };
+    const [counted] = await this.database.select<{ subjects: number }>(subjectsCounted, values);
+    return (counted?.subjects ?? 0) > fewAtMost;
   }
 
   /** The subjects that have words with these beginnings, as far as there are few. */
   private async subjectsWith(workshopId: string, beginnings: readonly string[]): Promise<string[]> {
-    const values = this.asked(workshopId, beginnings, fewAtMost);
+    const [first = '', second = first, third = second] = beginnings.map(pattern);
+    const values = { workshopId, kind: this.kind, first, second, third, limit: fewAtMost + 1 };
     const rows = await this.database.select<{ id: string }>(
       beginnings.length === 1 ? subjectsWithOne : subjectsWithThree,
       values,
     );
     return rows.map(({ id }) => id);
-  }
-
-  private asked(workshopId: string, beginnings: readonly string[], limit: number): Record<string, unknown> {
-    const [first = '', second = first, third = second] = beginnings.map(pattern);
-    return { workshopId, kind: this.kind, first, second, third, limit, few: fewAtMost };
   }
 }
 
