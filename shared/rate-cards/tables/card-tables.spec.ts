@@ -1,4 +1,4 @@
-import { cellAt } from '#shared/rate-cards/tables/cell-at';
+import { cellAt, differencePath, listAt } from '#shared/rate-cards/tables/cell-at';
 import { cardTables } from '#shared/rate-cards/tables/card-parts';
 import type { CardTable } from '#shared/rate-cards/tables/card-table';
 import { formCellPath, gridCellPath, listCellPath, type CellPath } from '#shared/rate-cards/tables/cell-path';
@@ -68,6 +68,30 @@ describe('The tables of a rate card', () => {
       (table, at) => table.kind === 'list' && table.within !== undefined && !ids.slice(0, at).includes(table.within),
     );
     expect(misplaced).toEqual([]);
+  });
+});
+
+describe('A difference between two cards', () => {
+  it.each([
+    ['money', 'grades', 'costPerHour', 'grades', 'card-column-cost-per-hour'],
+    ['buildUps', '', 'setUp_hours', 'working-day', 'card-column-set-up'],
+    ['buildUps', 'buildUps/steps', 'coats.plain', 'steps', 'card-column-coats-plain'],
+    ['buildUps', 'buildUps/steps', 'uses.1.loss_percent', 'uses', 'card-column-loss'],
+    ['buildUps', 'buildUps/steps', 'cautions.0', 'steps', 'card-column-cautions'],
+    ['leaf', 'products', 'breaks.0.off_percent', 'leaf-packs', 'card-column-off'],
+    ['leaf', '', 'losses.lays.faulting_percent.high', 'laying', 'card-column-faulting-high'],
+    ['carving', 'stages', 'share_hundredths', 'stages', 'card-column-share'],
+  ] as const)('of %s %s %s is shown in the table %s', (section, list, field, tableId, heading) => {
+    const cell = cellAt(differencePath({ section, list, field }));
+    expect([cell?.table.id, cell?.column.heading]).toEqual([tableId, heading]);
+  });
+
+  it.each([
+    ['buildUps', 'buildUps/steps', 'steps'],
+    ['buildUps', 'materials/packs', 'material-packs'],
+    ['carving', 'items', 'items'],
+  ] as const)('of the items of %s %s belongs to the table %s', (section, list, tableId) => {
+    expect(listAt(differencePath({ section, list, field: '' }))?.id).toBe(tableId);
   });
 });
 

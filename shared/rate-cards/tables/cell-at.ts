@@ -1,3 +1,4 @@
+import type { CardDifference } from '#shared/rate-cards/card-differences';
 import { cardTables } from '#shared/rate-cards/tables/card-parts';
 import type { CardColumn, CardTable, GridRow } from '#shared/rate-cards/tables/card-table';
 import { fieldsOf, gridCellPath, type CellPath } from '#shared/rate-cards/tables/cell-path';
@@ -46,10 +47,11 @@ export function listAt(path: CellPath): CardTable | undefined {
   return undefined;
 }
 
-/** The fields of a difference as a way: numbers among them are places in a list. */
-export const differencePath = (list: string, field: string): CellPath => [
-  ...list.split('/').flatMap((part, at) => [...(at > 0 ? [0] : []), ...fieldsOf(part)]),
-  ...(field === '' ? [] : [...(list === '' ? [] : [0]), ...fieldsOf(field).map(asPlace)]),
-];
-
 const asPlace = (field: string): string | number => (/^\d+$/.test(field) ? Number(field) : field);
+
+/** The way to what a difference speaks of, as far as tables go: each item stands at the first place of its list. */
+export function differencePath({ section, list, field }: Pick<CardDifference, 'section' | 'list' | 'field'>): CellPath {
+  const lists = list === '' ? [] : list.split('/').flatMap((one, at) => [...(at > 0 ? [0] : []), ...fieldsOf(one)]);
+  const below = field === '' ? [] : [...(list === '' ? [] : [0]), ...fieldsOf(field).map(asPlace)];
+  return [section, ...lists, ...below];
+}

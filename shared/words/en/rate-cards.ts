@@ -22,6 +22,7 @@ export const rateCards = {
   'history-rate-card-removed': 'The draft rate card {name} was removed',
   'history-rate-card-in-force': 'The rate card {name} was put in force from {day}',
   'history-rate-card-taken-back': 'The rate card {name} was made a draft again',
+  'rate-card-duration-unclear': 'Write a duration as 45 min, 12 h or 2 d 4 h.',
   'workbook-not-xlsx': 'This file is no workbook that can be read here; save it as .xlsx.',
   'workbook-too-large': 'This workbook is larger than any rate card.',
   'workbook-faulty':
