@@ -152,9 +152,16 @@ export class EstimateStore {
     if (settings && id) this.apply([{ kind: 'settings', id, content: { ...settings, ...change } }], 'settings');
   }
 
-  /** Takes the last step back, or first what could not be kept; gives the ids it touched. */
+  /** Takes the last step back; gives the ids it touched. */
   undo(): readonly string[] {
-    return this.unfinished.forgetAll() ?? this.told(this.rows.undo());
+    return this.told(this.rows.undo());
+  }
+
+  /** Gives up what could not be kept of a member, if there is any: one sees again what is kept. */
+  giveUpUnfinished(id: string): boolean {
+    const isUnfinished = this.unfinished.ids().has(id);
+    this.unfinished.forget(id);
+    return isUnfinished;
   }
 
   redo(): readonly string[] {

@@ -138,11 +138,11 @@ describe('MeasurePage', () => {
     expect(field('Length').value).toBe('12 foo');
   });
 
-  it('shows what an undo brings back, and half a length is what it takes back first', async () => {
+  it('shows again what is kept where half a length is given up, and what an undo brings back', async () => {
     await open();
     await type('Length', '1500');
     await type('Length', '15 foo');
-    store.undo();
+    expect(store.giveUpUnfinished(ids.edge)).toBe(true);
     await settle();
     expect(field('Length').value).toBe('1500');
     store.undo();

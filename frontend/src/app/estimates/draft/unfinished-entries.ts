@@ -20,11 +20,4 @@ export class UnfinishedEntries {
   forget(id: string): void {
     if (this.waiting().has(id)) this.waiting.update((waiting) => new Map([...waiting].filter(([key]) => key !== id)));
   }
-
-  /** Gives all of them up; the ids they were of, or undefined where there were none. */
-  forgetAll(): readonly string[] | undefined {
-    const ids = [...this.waiting().keys()];
-    this.waiting.set(new Map());
-    return ids.length > 0 ? ids : undefined;
-  }
 }

@@ -11,7 +11,7 @@ import type { MemberForm } from '../members/member-form';
   template: `
     <div class="fields particulars">
       <app-entry-at class="name" way="line" i18n-label label="Name" path="name" [form]="form()" />
-      <app-entry-at way="number" i18n-label label="How many alike" path="count" [form]="form()" />
+      <app-entry-at way="number" i18n-label label="How many" path="count" [form]="form()" />
       <app-entry-at way="choice" i18n-label label="Timber" path="timberId" [choices]="timbers()" [form]="form()" />
       @if (pieces().length > 1) {
         <app-entry-at way="choice" i18n-label label="Piece" path="pieceId" [choices]="pieces()" [form]="form()" />
@@ -20,14 +20,18 @@ import type { MemberForm } from '../members/member-form';
   `,
   styles: `
     .particulars {
-      grid-template-columns: repeat(auto-fill, minmax(min(100%, 124px), 1fr));
+      grid-template-columns: repeat(auto-fit, minmax(min(100%, 136px), 1fr));
     }
 
     .name {
       grid-column: span 2;
     }
 
-    @media (max-width: 400px) {
+    @media (min-width: 900px) {
+      .particulars {
+        grid-template-columns: minmax(0, 2.2fr) minmax(0, 1fr) minmax(0, 1.5fr) minmax(0, 1.5fr);
+      }
+
       .name {
         grid-column: auto;
       }

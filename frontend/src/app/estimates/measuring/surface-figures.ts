@@ -23,9 +23,10 @@ import { MemberSelection } from '../members/member-selection';
   `,
   styles: `
     dl {
-      display: flex;
-      flex-wrap: wrap;
-      gap: 8px 32px;
+      display: grid;
+      gap: 12px 32px;
+      grid-template-columns: repeat(auto-fit, minmax(136px, 1fr));
+      align-content: start;
       margin: 0;
     }
 

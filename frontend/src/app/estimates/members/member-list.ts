@@ -68,7 +68,10 @@ export class MemberList {
       if (event.altKey) this.shift(member, by);
       else this.focusBeside(event, by);
       event.preventDefault();
-    } else if (event.key === 'Delete' && this.store.mayEdit()) this.actions.remove(member);
+    } else if (event.key === 'Delete' && this.store.mayEdit()) {
+      this.actions.remove(member);
+      this.focus(() => this.selection.member()?.id);
+    }
   }
 
   protected async add(): Promise<void> {
@@ -98,7 +101,11 @@ export class MemberList {
   private shift(member: Member, by: -1 | 1): void {
     if (!this.store.mayEdit()) return;
     this.actions.shift(member, by);
-    const focus = () => this.host.nativeElement.querySelector<HTMLElement>(`[data-member="${member.id}"]`)?.focus();
+    this.focus(() => member.id);
+  }
+
+  private focus(id: () => string | undefined): void {
+    const focus = () => this.host.nativeElement.querySelector<HTMLElement>(`[data-member="${id() ?? ''}"]`)?.focus();
     afterNextRender(focus, { injector: this.injector });
   }
 

@@ -13,7 +13,7 @@ export class PlaceExplanation {
 
   /**
    * Where there is room beside it, what the place is about explains itself unasked; another thing, or nothing, takes its place. On a
-   * phone the reasons would cover the page, so they wait to be asked for.
+   * smaller screen the reasons would lie over the page, so they wait to be asked for.
    */
   follow(explained: () => Explained | undefined): void {
     let shown: string | undefined;
@@ -22,7 +22,7 @@ export class PlaceExplanation {
       untracked(() => {
         if (next?.id === shown) return;
         shown = next?.id;
-        if (next && matchMedia('(min-width: 901px)').matches) this.explanation.show(next);
+        if (next && matchMedia('(min-width: 1181px)').matches) this.explanation.show(next);
         else this.explanation.close();
       });
     });

@@ -72,8 +72,10 @@ export class Workspace implements OnInit {
     void this.store.open(this.open());
   }
 
+  /** Half a length or an impossible shape is the first thing one takes back. */
   protected undo(): void {
-    this.show(this.store.undo());
+    const shown = this.selection.isOnPlace() ? this.selection.member() : undefined;
+    if (!shown || !this.store.giveUpUnfinished(shown.id)) this.show(this.store.undo());
   }
 
   protected redo(): void {
