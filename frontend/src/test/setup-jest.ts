@@ -19,6 +19,8 @@ const noMatch = (media: string) => ({
   media,
   matches: false,
   onchange: null,
+  addListener() {},
+  removeListener() {},
   addEventListener() {},
   removeEventListener() {},
   dispatchEvent: () => false,

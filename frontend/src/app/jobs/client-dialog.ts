@@ -11,7 +11,7 @@ import { ClientForm } from './client-form';
   template: `
     <h2 mat-dialog-title i18n>A new client</h2>
     <mat-dialog-content>
-      <app-client-form [name]="name" (kept)="dialog.close($event)" (closed)="dialog.close()" />
+      <app-client-form brief [name]="name" (kept)="dialog.close($event)" (closed)="dialog.close()" />
     </mat-dialog-content>
   `,
 })

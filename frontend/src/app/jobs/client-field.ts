@@ -37,6 +37,7 @@ type Choice = Pick<Client, 'id' | 'name'> | 'new';
   imports: [Entry, Field, Icon, MatAutocomplete, MatAutocompleteTrigger, MatIconButton, MatOption],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './client-field.html',
+  styleUrl: './client-field.scss',
   providers: [{ provide: NG_VALUE_ACCESSOR, useExisting: ClientField, multi: true }],
 })
 export class ClientField extends ValueEntry<string | null> {
@@ -67,6 +68,8 @@ export class ClientField extends ValueEntry<string | null> {
   });
   protected readonly typed = linkedSignal(() => this.name());
   protected readonly found = signal<readonly Client[]>([]);
+  /** Another text makes another option, so that it is the one Enter takes when nobody is found. */
+  protected readonly newcomers = computed(() => (this.mayEnter() ? [{ name: this.typed().trim() }] : []));
   protected readonly said = computed(() =>
     this.wasLeft() && this.value() === null && this.typed().trim() !== ''
       ? $localize`Choose a client from the list.`
@@ -114,7 +117,8 @@ export class ClientField extends ValueEntry<string | null> {
   }
 
   protected choose(choice: Choice): void {
-    if (choice === 'new') return void this.enter(this.typed().trim());
+    // The list of choices closes once this is dealt with; only then may a dialog take the focus.
+    if (choice === 'new') return queueMicrotask(() => void this.enter(this.typed().trim()));
     this.chosen.set(choice);
     this.put(choice.id);
     this.typed.set(choice.name);

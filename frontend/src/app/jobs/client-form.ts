@@ -1,4 +1,13 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input, type OnInit, output } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  booleanAttribute,
+  computed,
+  inject,
+  input,
+  type OnInit,
+  output,
+} from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import {
@@ -13,6 +22,7 @@ import { holdWhileDirty } from '../core/forms/hold-while-dirty';
 import { newId } from '../core/new-id';
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
+import { focusFirst } from '../ui/field/focus-first';
 import { FormComplaint } from '../ui/field/form-complaint';
 import { ClientCalls } from './client-calls';
 import { clientDifferences } from './client-differences';
@@ -37,6 +47,8 @@ export class ClientForm implements OnInit {
   /** The client to be changed; without one a new client is entered. */
   readonly client = input<Client>();
   readonly name = input('');
+  /** Asks only for what a new job’s papers need; the rest can be added to the entry later. */
+  readonly brief = input(false, { transform: booleanAttribute });
   readonly kept = output<Client>();
   readonly closed = output();
 
@@ -47,6 +59,7 @@ export class ClientForm implements OnInit {
 
   constructor() {
     holdWhileDirty(this.form);
+    focusFirst();
   }
 
   ngOnInit(): void {

@@ -1,4 +1,16 @@
-import { ChangeDetectionStrategy, Component, computed, effect, inject, input, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  ElementRef,
+  Injector,
+  afterNextRender,
+  viewChild,
+  computed,
+  effect,
+  inject,
+  input,
+  signal,
+} from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { Router, RouterLink } from '@angular/router';
 import type { Client } from '#shared/jobs/client-schema';
@@ -30,6 +42,8 @@ export class ClientPage {
 
   readonly clientId = input.required<string>();
 
+  private readonly injector = inject(Injector);
+  private readonly changeButton = viewChild<unknown, ElementRef<HTMLElement>>('change', { read: ElementRef });
   protected readonly isChanging = signal(false);
   protected readonly kind = computed(() => clientKindNames[this.store.client()?.kind ?? 'person']);
 
@@ -43,7 +57,12 @@ export class ClientPage {
 
   protected keep(client: Client): void {
     this.store.put(client);
+    this.close();
+  }
+
+  protected close(): void {
     this.isChanging.set(false);
+    afterNextRender(() => this.changeButton()?.nativeElement.focus(), { injector: this.injector });
   }
 
   protected async remove(client: Client): Promise<void> {

@@ -30,6 +30,7 @@ export class ClientsPage {
   protected readonly list = new PagedList<ClientsAsked, Client>(this.asked, (asked, cursor, signal) =>
     this.calls.list(asked, cursor, signal),
   );
+  protected readonly isBare = computed(() => this.list.isEmpty() && !this.search());
   protected readonly kindNames = clientKindNames;
 
   protected look(search: string): void {

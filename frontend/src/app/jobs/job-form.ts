@@ -7,6 +7,7 @@ import { RowForm } from '../core/forms/row-form';
 import { newId } from '../core/new-id';
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
+import { focusFirst } from '../ui/field/focus-first';
 import { FormComplaint } from '../ui/field/form-complaint';
 import { ClientField } from './client-field';
 import { JobCalls } from './job-calls';
@@ -39,6 +40,7 @@ export class JobForm implements OnInit {
 
   constructor() {
     holdWhileDirty(this.form);
+    focusFirst();
   }
 
   ngOnInit(): void {

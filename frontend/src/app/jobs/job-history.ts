@@ -31,9 +31,8 @@ interface Line {
       @for (line of lines(); track line.id) {
         <li>
           <span class="muted small">{{ line.when }}</span>
-          <span
-            >{{ line.text }} <span class="muted small">{{ line.who }}</span></span
-          >
+          <span class="text">{{ line.text }}</span>
+          <span class="muted small">{{ line.who }}</span>
         </li>
       }
     </ol>
@@ -56,7 +55,7 @@ interface Line {
 
     li {
       display: grid;
-      grid-template-columns: 152px minmax(0, 1fr);
+      grid-template-columns: 144px minmax(0, 1fr) auto;
       gap: 0 16px;
       align-items: baseline;
       padding: 8px 0;
@@ -66,7 +65,12 @@ interface Line {
 
     @media (max-width: 640px) {
       li {
-        grid-template-columns: minmax(0, 1fr);
+        grid-template-columns: minmax(0, 1fr) auto;
+      }
+
+      .text {
+        grid-row: 2;
+        grid-column: 1 / -1;
       }
     }
   `,

@@ -1,5 +1,18 @@
 import { NgComponentOutlet } from '@angular/common';
-import { ChangeDetectionStrategy, Component, computed, effect, inject, input, resource, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  ElementRef,
+  Injector,
+  afterNextRender,
+  viewChild,
+  computed,
+  effect,
+  inject,
+  input,
+  resource,
+  signal,
+} from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { Router, RouterLink } from '@angular/router';
 import type { Job } from '#shared/jobs/job-schema';
@@ -41,6 +54,8 @@ export class JobPage {
   readonly jobId = input.required<string>();
 
   protected readonly estimates = resource({ loader: async () => this.loadEstimates?.() });
+  private readonly injector = inject(Injector);
+  private readonly changeButton = viewChild<unknown, ElementRef<HTMLElement>>('change', { read: ElementRef });
   protected readonly isChanging = signal(false);
   protected readonly mayChange = computed(() => this.session.may('owner', 'estimator', 'office'));
   protected readonly mayRemove = computed(() => this.session.may('owner', 'estimator'));
@@ -60,7 +75,12 @@ export class JobPage {
 
   protected keep(job: Job): void {
     this.store.put(job);
+    this.close();
+  }
+
+  protected close(): void {
     this.isChanging.set(false);
+    afterNextRender(() => this.changeButton()?.nativeElement.focus(), { injector: this.injector });
   }
 
   protected async finish(job: Job): Promise<void> {

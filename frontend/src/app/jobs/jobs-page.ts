@@ -67,6 +67,7 @@ export class JobsPage {
     this.calls.list(asked, cursor, signal),
   );
   protected readonly isNarrowed = computed(() => Boolean(this.search() || this.chosenState() || this.client()));
+  protected readonly isBare = computed(() => this.list.isEmpty() && !this.isNarrowed());
   protected readonly mayOpen = computed(() => this.session.may('owner', 'estimator', 'office'));
   protected readonly ofClient = new FormControl<string | null>(null);
   protected readonly stateOptions = jobStates.map((state) => ({ state, name: jobStateNames[state] }));

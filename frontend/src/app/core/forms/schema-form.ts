@@ -143,11 +143,16 @@ export class SchemaForm<S extends z.ZodObject> {
   }
 
   private turnBack(): false {
-    afterNextRender(() => this.document.querySelector<HTMLElement>('form [aria-invalid="true"]')?.focus(), {
-      injector: this.injector,
-    });
+    afterNextRender(() => firstWrongEntry(this.document)?.focus(), { injector: this.injector });
     return false;
   }
+}
+
+/** The first wrong entry of the uppermost form: one in a dialog stands after the one of the page below it. */
+function firstWrongEntry(document: Document): HTMLElement | undefined {
+  const wrong = [...document.querySelectorAll<HTMLElement>('form [aria-invalid="true"]')];
+  const form = wrong.at(-1)?.closest('form');
+  return wrong.find((entry) => entry.closest('form') === form);
 }
 
 /** Gives every control the first remark made about it, without another round of events. */

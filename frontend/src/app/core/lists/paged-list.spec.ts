@@ -18,15 +18,15 @@ function open() {
   const list = TestBed.runInInjectionContext(
     () =>
       new PagedList<string, string>(search, (query, cursor, abort) => {
-        const { promise, resolve, reject } = Promise.withResolvers<ListPage<string>>();
-        asked.push({
-          search: query,
-          cursor,
-          signal: abort,
-          answer: (page) => (resolve({ items: [], next: null, count: 0, countIsExact: true, ...page }), settle()),
-          fail: (message) => (reject(new Error(message)), settle()),
+        return new Promise((resolve, reject) => {
+          asked.push({
+            search: query,
+            cursor,
+            signal: abort,
+            answer: (page) => (resolve({ items: [], next: null, count: 0, countIsExact: true, ...page }), settle()),
+            fail: (message) => (reject(new Error(message)), settle()),
+          });
         });
-        return promise;
       }),
   );
   TestBed.tick();

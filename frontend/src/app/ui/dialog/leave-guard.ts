@@ -8,6 +8,6 @@ export const leaveGuard: CanDeactivateFn<unknown> = () =>
   !inject(Saving).hasUnsent() ||
   inject(Confirm).ask({
     heading: $localize`Leave before it is kept?`,
-    text: $localize`Your last entries are still on their way and would be lost.`,
+    text: $localize`Your last entries are not kept yet and would be lost.`,
     yes: $localize`Leave and lose them`,
   });
