@@ -1,5 +1,5 @@
 import { changePassword } from '#shared/accounts/password-endpoints';
-import { changeAccess, changeRoles, listPeople } from '#shared/accounts/people-endpoints';
+import { changeAccess, changeOwnName, changeRoles, listPeople } from '#shared/accounts/people-endpoints';
 import {
   endOtherSessions,
   enterWorkshop,
@@ -59,6 +59,15 @@ describe('time', () => {
     }
     api.clock.move({ minutes: 4 });
     expect((await visitor.call(listPeople)).status).toBe(401);
+  });
+
+  test('a stranger may take two hours over the sign-in page', async () => {
+    const { email } = await api.newcomer(api.ours, 'bench');
+    const [patient, late] = [await api.stranger(), await api.stranger()];
+    api.clock.move({ minutes: 119 });
+    expect((await patient.signIn(email, password)).status).toBe(200);
+    api.clock.move({ minutes: 2 });
+    expect((await late.signIn(email, password)).status).toBe(403);
   });
 
   test('it is marked as used at most once a minute', async () => {
@@ -139,7 +148,7 @@ describe('its end', () => {
     expect(response.status).toBe(204);
     expect(cookieOf(response.headers)).not.toBe('');
     expect((await other.call(listPeople)).status).toBe(401);
-    expect((await visitor.call(listPeople)).status).toBe(200);
+    expect((await visitor.call(changeOwnName, { body: { name: 'Herons still here' } })).status).toBe(200);
   });
 
   test('comes to the others when their owner says so, and they are listed until then', async () => {

@@ -5,5 +5,7 @@ declare module 'express-serve-static-core' {
     requestId: string;
     workshopId?: string;
     accountId?: string;
+    /** The forgery token that the next session of the same person goes on with. */
+    tokenToKeep?: string;
   }
 }

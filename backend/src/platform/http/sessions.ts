@@ -16,7 +16,7 @@ export const cookieName = (config: Config): string => (isPublic(config) ? '__Hos
 export const signedInOf = (request: Request): SignedIn | undefined => request.user as SignedIn | undefined;
 
 const beginSession = (request: Request): void => {
-  request.session.forgeryToken ??= randomBytes(32).toString('base64url');
+  request.session.forgeryToken ??= request.tokenToKeep ?? randomBytes(32).toString('base64url');
   request.session.handle ??= randomUUID();
   request.session.agent ??= (request.get('user-agent') ?? '').slice(0, 200);
 };
@@ -85,7 +85,10 @@ export class Sessions {
     };
   }
 
+  /** Under a new id; the token stays for the same person, whose page still holds it. */
   private signIn(request: Request, identity: Identity): Promise<void> {
+    const { passport, forgeryToken } = request.session;
+    if (passport?.user?.accountId === identity.accountId && forgeryToken) request.tokenToKeep = forgeryToken;
     return new Promise((resolve, reject) => {
       request.logIn(identity, (error) => (error ? reject(error as Error) : resolve()));
     });

@@ -4,8 +4,11 @@ import type { Clock } from '../clock/clock';
 import type { Database } from '../database/database';
 import './session-data';
 
-/** Half an hour without a request, twelve hours in all (NIST SP 800-63B-4, AAL2); marked as used at most once a minute. */
-export const sessionLife = { idle_minutes: 30, whole_minutes: 720, mark_minutes: 1 } as const;
+/**
+ * Half an hour without a request, twelve hours in all (NIST SP 800-63B-4, AAL2); marked as used at most once a minute. A stranger who
+ * only looks at the sign-in page may take two hours over it.
+ */
+export const sessionLife = { idle_minutes: 30, stranger_minutes: 120, whole_minutes: 720, mark_minutes: 1 } as const;
 
 interface SessionRow {
   readonly content: SessionData;
@@ -51,17 +54,25 @@ export class SessionStore extends Store {
 
   /** Deletes the sessions that have ended; answers how many. */
   sweep(): Promise<number> {
-    return this.database.execute('DELETE FROM sessions WHERE seen_at <= :idle OR created_at <= :whole', this.ends());
+    return this.database.execute(
+      'DELETE FROM sessions WHERE seen_at <= IF(account_id IS NULL, :stranger, :idle) OR created_at <= :whole',
+      this.ends(),
+    );
   }
 
-  private ends(): { idle: Date; whole: Date } {
+  private ends() {
     const now = this.clock.now();
-    return { idle: minutesBefore(now, sessionLife.idle_minutes), whole: minutesBefore(now, sessionLife.whole_minutes) };
+    return {
+      idle: minutesBefore(now, sessionLife.idle_minutes),
+      stranger: minutesBefore(now, sessionLife.stranger_minutes),
+      whole: minutesBefore(now, sessionLife.whole_minutes),
+    };
   }
 
   private async read(id: string): Promise<SessionData | null> {
     const [row] = await this.database.select<SessionRow>(
-      'SELECT content, seen_at AS seenAt FROM sessions WHERE id_hash = :hash AND seen_at > :idle AND created_at > :whole',
+      `SELECT content, seen_at AS seenAt FROM sessions
+       WHERE id_hash = :hash AND seen_at > IF(account_id IS NULL, :stranger, :idle) AND created_at > :whole`,
       { hash: hashOf(id), ...this.ends() },
     );
     return row ? { ...row.content, seenAt: row.seenAt.getTime() } : null;
