@@ -1,8 +1,10 @@
-import { busyWith } from '#shared/drying/free-span';
-import { type BusyGrades, placedBlock, type PlacedCoat, type Placing } from '#shared/drying/placed-block';
-import type { StepBlock } from '#shared/drying/step-blocks';
 import { dayLength_minutes } from '#shared/drying/day-length-minutes';
+import { busyWith } from '#shared/drying/free-span';
+import { leastPortions } from '#shared/drying/least-portions';
 import { nextWorkingMinute } from '#shared/drying/next-working-minute';
+import { placedBlock, type PlacedCoat } from '#shared/drying/placed-block';
+import type { StepBlock } from '#shared/drying/step-blocks';
+import { type BusyGrades, type Placing, timedSteps } from '#shared/drying/timed-step';
 import type { Finding } from '#shared/words/finding';
 
 /** One stretch of work on one lot: a coat of a step, or of a portion of it. */
@@ -15,7 +17,7 @@ export interface PlacedTask extends PlacedCoat {
 export interface BlockAt {
   readonly lotId: string;
   readonly from_minutes: number;
-  readonly placing: Omit<Placing, 'portions' | 'keepsLimits'>;
+  readonly placing: Omit<Placing, 'portions'>;
 }
 
 /** The stretches of work of a block, and when each grade is busy with them too. */
@@ -33,11 +35,17 @@ const finerBy = 4;
 const worth_minutes = 2 * dayLength_minutes;
 
 /** The earliest start up to a moment from which a block keeps its limits; whatever starts at the same time is tried once. */
-function firstFit(block: StepBlock, span: { from: number; to: number }, placing: Placing): PlacedCoat[] | null {
+function firstFit(
+  block: StepBlock,
+  span: { from: number; to: number },
+  placing: Placing,
+): readonly PlacedCoat[] | null {
+  const steps = timedSteps(block.steps, placing);
+  const rules = { time: placing.time, keepsLimits: true };
   let start = nextWorkingMinute(span.from, placing.time);
   while (start <= span.to) {
-    const { coats, isWhole } = placedBlock(block.steps, start, placing);
-    if (isWhole) return [...coats];
+    const { coats, isWhole } = placedBlock(steps, start, rules);
+    if (isWhole) return coats;
     const tried = coats[0]?.start_minutes ?? start;
     start = nextWorkingMinute(tried + tryEvery_minutes, placing.time);
   }
@@ -46,12 +54,13 @@ function firstFit(block: StepBlock, span: { from: number; to: number }, placing:
 
 /** Whether hands with nothing else to do could keep the limits of one portion, on whatever day of the week they start. */
 function isPossible(block: StepBlock, portions: number, { time }: BlockAt['placing']): boolean {
-  const placing: Placing = { time, busy: new Map(), notBefore: () => 0, portions, keepsLimits: true };
+  const placing: Placing = { time, busy: new Map(), notBefore: () => 0, portions };
   return firstFit(block, { from: 0, to: week_minutes }, placing) !== null;
 }
 
 function fewestPortions(block: StepBlock, { placing }: BlockAt): number | null {
-  for (let portions = 1; portions <= (block.inPortions ? mostPortions : 1); portions += 1)
+  const most = block.inPortions ? mostPortions : 1;
+  for (let portions = leastPortions(block.steps, placing.time); portions <= most; portions += 1)
     if (isPossible(block, portions, placing)) return portions;
   return null;
 }
@@ -74,11 +83,11 @@ function allPortions(block: StepBlock, at: BlockAt, portions: number): Placed | 
   let { busy } = at.placing;
   let { from_minutes } = at;
   for (let portion = 1; portion <= portions; portion += 1) {
-    const placing: Placing = { ...at.placing, busy, portions, keepsLimits: true };
+    const placing: Placing = { ...at.placing, busy, portions };
     const span = { from: from_minutes, to: freeFrom(block, from_minutes, placing) + week_minutes };
     const coats = firstFit(block, span, placing);
     if (!coats) return null;
-    tasks.push(...coats.map((coat) => ({ ...coat, lotId: at.lotId, portion })));
+    for (const coat of coats) tasks.push({ ...coat, lotId: at.lotId, portion });
     busy = withTasks(busy, coats);
     from_minutes = coats[0]?.start_minutes ?? from_minutes;
   }
@@ -87,23 +96,26 @@ function allPortions(block: StepBlock, at: BlockAt, portions: number): Placed | 
 
 const nameOf = (block: StepBlock): string => block.steps[0]?.name ?? '';
 
-function overTime(block: StepBlock, at: BlockAt): Placed & { findings: Finding[] } {
-  const { coats } = placedBlock(block.steps, at.from_minutes, { ...at.placing, portions: 1, keepsLimits: false });
-  const finding: Finding = { kind: 'warn', code: 'drying-no-window', values: { step: nameOf(block) }, about: at.lotId };
-  const tasks = coats.map((coat) => ({ ...coat, lotId: at.lotId, portion: 1 }));
-  return { tasks, busy: withTasks(at.placing.busy, coats), findings: [finding] };
+function overTime(block: StepBlock, { lotId, from_minutes, placing }: BlockAt): Placed & { findings: Finding[] } {
+  const steps = timedSteps(block.steps, { ...placing, portions: 1 });
+  const { coats } = placedBlock(steps, from_minutes, { time: placing.time, keepsLimits: false });
+  const finding: Finding = { kind: 'warn', code: 'drying-no-window', values: { step: nameOf(block) }, about: lotId };
+  const tasks = coats.map((coat) => ({ ...coat, lotId, portion: 1 }));
+  return { tasks, busy: withTasks(placing.busy, coats), findings: [finding] };
 }
 
-const endOf = ({ tasks }: Placed): number => Math.max(0, ...tasks.map((task) => task.end_minutes));
+const endOf = ({ tasks }: Placed): number => tasks.reduce((latest, task) => Math.max(latest, task.end_minutes), 0);
 
 /** The fewest portions, or a few more where that saves enough; null where no number of them keeps the limits. */
 function soonest(block: StepBlock, at: BlockAt): (Placed & { portions: number }) | null {
   const fewest = fewestPortions(block, at);
   if (fewest === null) return null;
+  const most = block.inPortions ? fewest + finerBy : fewest;
   let best: (Placed & { portions: number }) | null = null;
-  for (let portions = fewest; portions <= (block.inPortions ? fewest + finerBy : fewest); portions += 1) {
+  for (let portions = fewest; portions <= most; portions += 1) {
     const placed = allPortions(block, at, portions);
     if (placed && (!best || endOf(placed) + worth_minutes <= endOf(best))) best = { ...placed, portions };
+    if (best && endOf(best) < at.from_minutes + worth_minutes) break;
   }
   return best;
 }

@@ -2,6 +2,7 @@ import { chosenDraft } from '#shared/estimates/chosen-draft';
 import type { Choice, Draft } from '#shared/estimates/draft';
 import { estimateWork, type EstimateWork } from '#shared/estimates/estimate-work';
 import type { CostFigures, Figures, PurchaseFigures } from '#shared/estimates/figures';
+import { directCost } from '#shared/estimates/price/direct-cost';
 import { priceOf } from '#shared/estimates/price/price-of';
 import type { Price } from '#shared/estimates/price/price';
 import type { PriceContingency, PriceInput } from '#shared/estimates/price/price-input';
@@ -28,6 +29,7 @@ export interface PreparedEstimate {
   readonly input: EstimateInput;
   readonly draft: Draft;
   readonly work: EstimateWork;
+  /** What the draws are made from; worked out when it is first asked for. */
   readonly risk: RiskInput;
   /** Whether the price waits for the draws: contingency is taken from them. */
   readonly needsRisk: boolean;
@@ -57,7 +59,7 @@ function priceInput(at: Omit<PreparedEstimate, 'risk' | 'needsRisk'>, contingenc
 function riskInput(at: Omit<PreparedEstimate, 'risk' | 'needsRisk'>): RiskInput {
   const { card, currency } = at.input;
   const { settings } = at.draft;
-  const { cost } = priceOf(priceInput(at, { way: 'share', percent: '0' }));
+  const cost = directCost(priceInput(at, { way: 'share', percent: '0' }));
   const drawn = riskOfWork(at.work, card, currencyDigits(currency));
   const { distribution, commonFactor } = card.money.contingency;
   return {
@@ -79,7 +81,14 @@ export function prepareEstimate(input: EstimateInput): PreparedEstimate {
   const work = estimateWork(draft, input.card);
   const prepared = { input, draft, work };
   const needsRisk = contingencyOf(draft.settings, input.card).way === 'risk';
-  return { ...prepared, risk: riskInput(prepared), needsRisk };
+  let risk: RiskInput | null = null;
+  return {
+    ...prepared,
+    needsRisk,
+    get risk() {
+      return (risk ??= riskInput(prepared));
+    },
+  };
 }
 
 /** All that the price of a prepared estimate is worked from, contingency by share or as the risk found it (0 without risk). */

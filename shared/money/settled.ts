@@ -1,10 +1,14 @@
+/** A whole number of at most ten digits has no noise to be taken out. */
+const fewerThanTenDigits = 1e10;
+
 /**
  * Takes the last-bit noise out of a floating-point figure before it enters a count or money (1e-9 relative), since `sin`, `exp`
  * and `pow` may differ in the last bit between engines. Any unit; throws a RangeError for a figure that is not finite.
  */
 export function settled(figure: number): number {
   if (!Number.isFinite(figure)) throw new RangeError('a figure must be finite');
-  return figure === 0 ? 0 : Number(figure.toPrecision(10));
+  if (Number.isInteger(figure) && Math.abs(figure) < fewerThanTenDigits) return figure + 0;
+  return Number(figure.toPrecision(10));
 }
 
 /** Whole pieces that cover a figure: ceil(x − 1e-6), so that an exact fit stays one. Never below zero. */

@@ -4,11 +4,24 @@ import { settled } from '#shared/money/settled';
 
 const weightOf = (weight: number | D): D => (typeof weight === 'number' ? new D(String(settled(weight))) : weight);
 
+interface Fraction {
+  readonly place: number;
+  readonly exact: D;
+  readonly about: number;
+}
+
+/** Decimals are compared only where floating-point figures cannot tell; those of fractions are good to 1e-15. */
+const bySize = (one: Fraction, other: Fraction): number =>
+  Math.abs(other.about - one.about) > 1e-12 ? other.about - one.about : other.exact.comparedTo(one.exact);
+
 /** The places to correct by one: those whose fraction has the sign of what is left, largest first, ties to the earlier. */
 function placesToCorrect(fractions: readonly D[], left: number): number[] {
   return fractions
-    .map((fraction, place) => ({ place, size: fraction.times(Math.sign(left)) }))
-    .sort((one, other) => other.size.comparedTo(one.size) || one.place - other.place)
+    .map((fraction, place) => {
+      const exact = left < 0 ? fraction.negated() : fraction;
+      return { place, exact, about: exact.toNumber() };
+    })
+    .sort((one, other) => bySize(one, other) || one.place - other.place)
     .slice(0, Math.abs(left))
     .map(({ place }) => place);
 }
@@ -26,6 +39,7 @@ export function splitByLargestRemainder(total_minor: MinorUnits, weights: readon
   const shares = exactWeights.map((weight) => weight.times(total_minor).div(sum));
   const parts = shares.map((share) => share.trunc().toNumber() + 0);
   const left = total_minor - parts.reduce((before, part) => before + part, 0);
+  if (left === 0) return parts.map(safeMinor);
   const fractions = shares.map((share, place) => share.minus(parts[place]));
   for (const place of placesToCorrect(fractions, left)) parts[place] += Math.sign(left);
   return parts.map(safeMinor);

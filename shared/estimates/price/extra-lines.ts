@@ -1,6 +1,7 @@
 import { labourItems } from '#shared/estimates/price/labour-items';
 import { boughtItem, type LineWork } from '#shared/estimates/price/line-work';
 import type { PriceInput } from '#shared/estimates/price/price-input';
+import { type PriceRates, priceRates } from '#shared/estimates/price/price-rates';
 import type { ExtraLine } from '#shared/estimates/settings';
 import { D } from '#shared/money/decimal';
 import { exactFigure } from '#shared/money/exact-figure';
@@ -16,11 +17,14 @@ const timberCost = (timber: Timber, digits: number): D =>
     .times(exactMinor(timber.price_per_dm3, digits));
 
 /** What an extra line adds to the plain frame of a line. */
-function workOf(extra: ExtraLine, input: PriceInput): Partial<LineWork> & Pick<LineWork, 'kind'> {
-  const { digits } = input;
+function workOf(
+  extra: ExtraLine,
+  { digits }: PriceInput,
+  rates: PriceRates,
+): Partial<LineWork> & Pick<LineWork, 'kind'> {
   switch (extra.kind) {
     case 'labour':
-      return { kind: extra.work, items: labourItems([extra], input) };
+      return { kind: extra.work, items: labourItems([extra], rates) };
     case 'bought-in':
       return { kind: 'bought-in', items: [boughtItem('bought-in', exactMinor(extra.cost, digits))] };
     case 'timber':
@@ -40,6 +44,7 @@ function workOf(extra: ExtraLine, input: PriceInput): Partial<LineWork> & Pick<L
 
 /** Each extra line as a line of its own, in the order they were entered. */
 export function extraLines(input: PriceInput): LineWork[] {
+  const rates = priceRates(input);
   return input.extras.map((extra) => ({
     id: extra.id,
     memberId: extra.memberId,
@@ -48,6 +53,6 @@ export function extraLines(input: PriceInput): LineWork[] {
     items: [],
     price_minor: null,
     insured_percent: null,
-    ...workOf(extra, input),
+    ...workOf(extra, input, rates),
   }));
 }

@@ -1,6 +1,6 @@
 import { boughtItem, type LineWork, sumOf } from '#shared/estimates/price/line-work';
 import type { PriceInput } from '#shared/estimates/price/price-input';
-import { type PricedWork, pricedWork } from '#shared/estimates/price/priced-work';
+import { type PricedWork, pricedWork, type Pricing } from '#shared/estimates/price/priced-work';
 import { D, type MinorUnits } from '#shared/money/decimal';
 import { priceFactor } from '#shared/money/margin';
 import { exactMinor } from '#shared/money/minor-of';
@@ -26,7 +26,8 @@ export function insuredValue(others_minor: MinorUnits, insured: readonly LineWor
 }
 
 /** A line insuring the price, once the value is known (unrounded minor units). */
-export function insuredWork(line: LineWork, value: D, input: PriceInput): PricedWork {
+export function insuredWork(line: LineWork, value: D, pricing: Pricing): PricedWork {
   const cost = value.times(insuredShare(line));
-  return pricedWork({ ...line, items: [boughtItem('insurance', cost)] }, cost.times(contingencyShare(input)), input);
+  const contingency = cost.times(contingencyShare(pricing.input));
+  return pricedWork({ ...line, items: [boughtItem('insurance', cost)] }, contingency, pricing);
 }

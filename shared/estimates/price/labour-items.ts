@@ -1,7 +1,7 @@
 import { boughtItem, type CostItem, sumOf } from '#shared/estimates/price/line-work';
-import type { PriceInput } from '#shared/estimates/price/price-input';
+import type { PriceRates } from '#shared/estimates/price/price-rates';
+import { D } from '#shared/money/decimal';
 import { exactFigure } from '#shared/money/exact-figure';
-import { exactMinor } from '#shared/money/minor-of';
 
 /** Hours of one grade. */
 export interface GradeHours {
@@ -9,11 +9,13 @@ export interface GradeHours {
   readonly hours: number;
 }
 
-function gradeItem({ gradeId, hours }: GradeHours, { card, digits }: PriceInput): CostItem {
+const nothing = new D(0);
+
+function gradeItem({ gradeId, hours }: GradeHours, { grades }: PriceRates): CostItem {
   if (hours < 0) throw new RangeError('hours must not be negative');
-  const grade = card.grades.find((each) => each.id === gradeId);
+  const grade = grades.get(gradeId);
   const exact = exactFigure(hours);
-  const cost = exact.times(exactMinor(grade?.costPerHour ?? '0', digits));
+  const cost = exact.times(grade?.perHour ?? nothing);
   return { head: 'labour', itemId: gradeId, name: grade?.name ?? gradeId, hours: exact, cost };
 }
 
@@ -25,10 +27,10 @@ function joined(labour: readonly GradeHours[]): GradeHours[] {
 }
 
 /** Labour of one line by grade, and the consumables that go with it as a share of its cost; unrounded minor units. */
-export function labourItems(labour: readonly GradeHours[], input: PriceInput): CostItem[] {
-  const items = joined(labour).map((entry) => gradeItem(entry, input));
+export function labourItems(labour: readonly GradeHours[], rates: PriceRates): CostItem[] {
+  const items = joined(labour).map((entry) => gradeItem(entry, rates));
   const consumables = sumOf(items.map((item) => item.cost))
-    .times(input.card.consumables_percent)
+    .times(rates.consumables_percent)
     .div(100);
   return consumables.isZero() ? items : [...items, boughtItem('consumables', consumables)];
 }

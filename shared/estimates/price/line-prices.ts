@@ -1,6 +1,7 @@
 import { insuredValue, insuredWork } from '#shared/estimates/price/insured-work';
 import { directOf, type LineWork, sumOf } from '#shared/estimates/price/line-work';
 import type { PriceInput } from '#shared/estimates/price/price-input';
+import { priceRates } from '#shared/estimates/price/price-rates';
 import { type PricedWork, pricedWork } from '#shared/estimates/price/priced-work';
 import { D } from '#shared/money/decimal';
 import { minorOf } from '#shared/money/minor-of';
@@ -37,9 +38,10 @@ export function linePrices(works: readonly LineWork[], input: PriceInput): LineP
   const insured = works.filter((work) => work.insured_percent !== null);
   const others = works.filter((work) => work.insured_percent === null);
   const parts = contingencies(others.map(directOf), input);
-  const priced = new Map(others.map((work, place) => [work, pricedWork(work, parts[place], input)]));
+  const pricing = { input, rates: priceRates(input) };
+  const priced = new Map(others.map((work, place) => [work, pricedWork(work, parts[place], pricing)]));
   const value = insuredValue(sumMinor([...priced.values()].map((line) => line.price_minor)), insured, input);
-  for (const work of insured) priced.set(work, insuredWork(work, value ?? new D(0), input));
+  for (const work of insured) priced.set(work, insuredWork(work, value ?? new D(0), pricing));
   const lines = works.map((work) => priced.get(work)).filter((line) => line !== undefined);
   const findings: Finding[] = value === null ? [{ kind: 'refuse', code: 'price-insurance-over', values: {} }] : [];
   return spread({ lines, findings }, input);

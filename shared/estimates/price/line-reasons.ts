@@ -1,9 +1,9 @@
-import { type CostItem, hoursOf, labourOf } from '#shared/estimates/price/line-work';
+import type { CostItem } from '#shared/estimates/price/line-work';
 import type { PriceInput } from '#shared/estimates/price/price-input';
-import type { PricedWork } from '#shared/estimates/price/priced-work';
+import type { PricedWork, Pricing } from '#shared/estimates/price/priced-work';
+import type { PriceRates } from '#shared/estimates/price/price-rates';
 import type { CostHead } from '#shared/estimates/price/work-kind';
 import type { D } from '#shared/money/decimal';
-import { exactMinor } from '#shared/money/minor-of';
 import type { Reason } from '#shared/words/reason';
 import type { WordCode, WordValues } from '#shared/words/word-code';
 
@@ -24,17 +24,16 @@ const codeOfHead: Readonly<Record<CostHead, WordCode>> = {
   insurance: 'cost-insurance',
 };
 
-function itemReason(item: CostItem, { card, digits }: PriceInput): Reason {
+function itemReason(item: CostItem, { rates }: Pricing): Reason {
   if (item.head === 'consumables') {
-    const values = { share_percent: Number(card.consumables_percent) };
+    const values = { share_percent: rates.consumables_percent.toNumber() };
     return { ...minor('cost-consumables', item.cost, values), house: 'consumables_percent' };
   }
   if (item.head !== 'labour') return minor(codeOfHead[item.head], item.cost, { item: item.name });
-  const rate = card.grades.find((grade) => grade.id === item.itemId)?.costPerHour ?? '0';
   const values = {
     grade: item.name,
     worked_hours: item.hours.toNumber(),
-    rate_minor: exactMinor(rate, digits).toNumber(),
+    rate_minor: rates.grades.get(item.itemId ?? '')?.perHour.toNumber() ?? 0,
   };
   return { ...minor('cost-labour', item.cost, values), house: item.name };
 }
@@ -43,15 +42,14 @@ function itemReason(item: CostItem, { card, digits }: PriceInput): Reason {
 export function overheadReason(
   overhead: D | number,
   on: { hours: D | number; labour: D | number },
-  input: PriceInput,
+  rates: PriceRates,
 ): Reason {
-  const { card, digits } = input;
-  if (card.overhead.way === 'per-hour') {
-    const rate_minor = exactMinor(card.overhead.perHour, digits).toNumber();
-    const values = { worked_hours: Number(on.hours), rate_minor };
+  const rate = rates.overhead.rate.toNumber();
+  if (rates.overhead.way === 'per-hour') {
+    const values = { worked_hours: Number(on.hours), rate_minor: rate };
     return { ...minor('cost-overhead-hours', overhead, values), house: 'overhead' };
   }
-  const values = { share_percent: Number(card.overhead.percent), labour_minor: Number(on.labour) };
+  const values = { share_percent: rate, labour_minor: Number(on.labour) };
   return { ...minor('cost-overhead-share', overhead, values), house: 'overhead' };
 }
 
@@ -70,13 +68,14 @@ export function profitReason(price: D | number, cost: D | number, { profit }: Pr
 }
 
 /** How the price of one line came about, step by step; figures in minor units, not yet rounded but for the last. */
-export function lineReasons(line: PricedWork, input: PriceInput): Reason[] {
-  const { work, direct, overhead, contingency, unrounded, price_minor } = line;
+export function lineReasons(line: PricedWork, pricing: Pricing): Reason[] {
+  const { work, hours, labour, direct, overhead, contingency, unrounded, price_minor } = line;
+  const { input, rates } = pricing;
   if (work.price_minor !== null) return [minor('price-own', price_minor)];
   const cost = direct.plus(overhead).plus(contingency);
   return [
-    ...work.items.map((item) => itemReason(item, input)),
-    overheadReason(overhead, { hours: hoursOf(work), labour: labourOf(work) }, input),
+    ...work.items.map((item) => itemReason(item, pricing)),
+    overheadReason(overhead, { hours, labour }, rates),
     contingencyReason(contingency, direct, input),
     profitReason(unrounded, cost, input),
     minor(input.lumpSum ? 'price-part-of-lump-sum' : 'price-rounded', price_minor),

@@ -1,9 +1,10 @@
 import { costReasons } from '#shared/estimates/price/cost-reasons';
 import { lineReasons } from '#shared/estimates/price/line-reasons';
-import { type CostItem, hoursOf, sumOf } from '#shared/estimates/price/line-work';
+import { type CostItem, sumOf } from '#shared/estimates/price/line-work';
 import type { PriceCost, PriceHead, PriceLineCost } from '#shared/estimates/price/price';
 import type { PriceInput } from '#shared/estimates/price/price-input';
-import type { PricedWork } from '#shared/estimates/price/priced-work';
+import { priceRates } from '#shared/estimates/price/price-rates';
+import type { PricedWork, Pricing } from '#shared/estimates/price/priced-work';
 import { costHeads } from '#shared/estimates/price/work-kind';
 import { D, type MinorUnits } from '#shared/money/decimal';
 import { marginOfMarkUp, priceFactor } from '#shared/money/margin';
@@ -46,18 +47,18 @@ interface Sums {
   readonly cost_minor: MinorUnits;
 }
 
-function sumsOf(priced: readonly PricedWork[], input: PriceInput): Sums {
+function sumsOf(priced: readonly PricedWork[], pricing: Pricing): Sums {
   const direct = roundedParts(priced.map((line) => line.direct));
   const overhead = roundedParts(priced.map((line) => line.overhead));
   const contingency = roundedParts(priced.map((line) => line.contingency));
   const lines = priced.map((line, place) => ({
     lineId: line.work.id,
-    hours: hoursOf(line.work).toNumber(),
+    hours: line.hours.toNumber(),
     direct_minor: direct.parts[place],
     overhead_minor: overhead.parts[place],
     contingency_minor: contingency.parts[place],
     cost_minor: sumMinor([direct.parts[place], overhead.parts[place], contingency.parts[place]]),
-    reasons: lineReasons(line, input),
+    reasons: lineReasons(line, pricing),
   }));
   const totals = [direct.total_minor, overhead.total_minor, contingency.total_minor] as const;
   const [direct_minor, overhead_minor, contingency_minor] = totals;
@@ -69,14 +70,15 @@ const percentOfWhole = (part: number, whole: number): number | null =>
 
 /** The workshop's side of priced lines, with what is left of a net price after discount; whole minor units. */
 export function priceCost(priced: readonly PricedWork[], net_minor: MinorUnits, input: PriceInput): PriceCost {
-  const sums = sumsOf(priced, input);
+  const pricing = { input, rates: priceRates(input) };
+  const sums = sumsOf(priced, pricing);
   const markUp = priceFactor(input.profit).minus(1).times(100);
   const profit_minor = sumMinor([net_minor, -sums.cost_minor]);
   const own = priced.filter((line) => line.work.price_minor !== null).map((line) => line.price_minor);
   const cost: Omit<PriceCost, 'reasons'> = {
     heads: headsOf(priced.flatMap((line) => line.work.items)),
     ...sums,
-    hours: sumOf(priced.map((line) => hoursOf(line.work))).toNumber(),
+    hours: sumOf(priced.map((line) => line.hours)).toNumber(),
     priced_minor: sumMinor(own),
     margin_percent: marginOfMarkUp(markUp).toDecimalPlaces(4).toNumber(),
     markUp_percent: markUp.toDecimalPlaces(4).toNumber(),
@@ -84,5 +86,5 @@ export function priceCost(priced: readonly PricedWork[], net_minor: MinorUnits, 
     marginLeft_percent: percentOfWhole(profit_minor, net_minor),
     markUpLeft_percent: percentOfWhole(profit_minor, sums.cost_minor),
   };
-  return { ...cost, reasons: costReasons(cost, input) };
+  return { ...cost, reasons: costReasons(cost, pricing) };
 }

@@ -7,6 +7,7 @@ import { percentOf } from '#shared/money/percent-of';
 import { splitByLargestRemainder } from '#shared/money/split-by-largest-remainder';
 import { sumMinor } from '#shared/money/sum-minor';
 import { taxByCategory, taxKey, taxOn, type TaxRate } from '#shared/money/tax-by-category';
+import { groupedBy } from '#shared/units/grouped-by';
 import type { Reason } from '#shared/words/reason';
 
 const lineOf = ({ work, price_minor }: PricedWork): PriceLine => ({
@@ -32,7 +33,11 @@ function discountOf(subtotal_minor: MinorUnits, { discount, digits }: PriceInput
 
 /** Tax per category on its subtotal; the discount belongs to the document and is spread over the categories by largest remainder. */
 function taxesOf(lines: readonly PriceLine[], discount_minor: MinorUnits, input: PriceInput): PriceTax[] {
-  const taxed = lines.map((line) => ({ tax: taxRateOf(line.taxCategoryId, input), net_minor: line.price_minor, line }));
+  const taxed = [...groupedBy(lines, (line) => line.taxCategoryId)].map(([taxCategoryId, own]) => ({
+    taxCategoryId,
+    tax: taxRateOf(taxCategoryId, input),
+    net_minor: sumMinor(own.map((line) => line.price_minor)),
+  }));
   const { categories } = taxByCategory(taxed);
   const discounts = splitByLargestRemainder(
     discount_minor,
@@ -40,7 +45,7 @@ function taxesOf(lines: readonly PriceLine[], discount_minor: MinorUnits, input:
   );
   return categories.map(({ tax, net_minor }, place) => {
     const reduced_minor = net_minor - discounts[place];
-    const taxCategoryId = taxed.find((each) => taxKey(each.tax) === taxKey(tax))?.line.taxCategoryId ?? '';
+    const taxCategoryId = taxed.find((each) => taxKey(each.tax) === taxKey(tax))?.taxCategoryId ?? '';
     return { taxCategoryId, tax, net_minor: reduced_minor, tax_minor: taxOn(reduced_minor, tax) };
   });
 }

@@ -2,6 +2,7 @@ import type { PriceLine } from '#shared/estimates/price/price';
 import { type WorkKind, workKinds } from '#shared/estimates/price/work-kind';
 import type { MinorUnits } from '#shared/money/decimal';
 import { sumMinor } from '#shared/money/sum-minor';
+import { groupedBy } from '#shared/units/grouped-by';
 
 /** Lines of one member (null: of the job as a whole) or one kind of work, and what they come to. */
 export interface PriceSection<Key> {
@@ -11,10 +12,9 @@ export interface PriceSection<Key> {
 }
 
 function sectionsBy<Key>(lines: readonly PriceLine[], keyOf: (line: PriceLine) => Key): PriceSection<Key>[] {
-  return [...new Set(lines.map(keyOf))].map((key) => {
-    const own = lines.filter((line) => keyOf(line) === key);
-    return { key, lines: own, price_minor: sumMinor(own.map((line) => line.price_minor)) };
-  });
+  return [...groupedBy(lines, keyOf)].map(([key, own]) => ({
+    ...{ key, lines: own, price_minor: sumMinor(own.map((line) => line.price_minor)) },
+  }));
 }
 
 /** Lines member by member, the job as a whole last; whole minor units. The sections sum to the subtotal whichever way they are cut. */

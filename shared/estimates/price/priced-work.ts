@@ -1,8 +1,8 @@
 import { directOf, hoursOf, labourOf, type LineWork } from '#shared/estimates/price/line-work';
 import type { PriceInput } from '#shared/estimates/price/price-input';
+import type { PriceRates } from '#shared/estimates/price/price-rates';
 import { D, type MinorUnits } from '#shared/money/decimal';
 import { priceOfCost } from '#shared/money/margin';
-import { exactMinor } from '#shared/money/minor-of';
 import { roundMinor } from '#shared/money/round-minor';
 
 /**
@@ -18,7 +18,9 @@ import { roundMinor } from '#shared/money/round-minor';
  */
 export interface PricedWork {
   readonly work: LineWork;
-  /** Unrounded minor units, all four. */
+  readonly hours: D;
+  /** Unrounded minor units, all five. */
+  readonly labour: D;
   readonly direct: D;
   readonly overhead: D;
   readonly contingency: D;
@@ -27,16 +29,21 @@ export interface PricedWork {
   readonly price_minor: MinorUnits;
 }
 
-function overheadOf(line: LineWork, { card: { overhead }, digits }: PriceInput): D {
-  return overhead.way === 'per-hour'
-    ? hoursOf(line).times(exactMinor(overhead.perHour, digits))
-    : labourOf(line).times(overhead.percent).div(100);
+/** What the price of any line arises with. */
+export interface Pricing {
+  readonly input: PriceInput;
+  readonly rates: PriceRates;
+}
+
+function overheadOf(on: { hours: D; labour: D }, { way, rate }: PriceRates['overhead']): D {
+  return way === 'per-hour' ? on.hours.times(rate) : on.labour.times(rate).div(100);
 }
 
 /** A line with its price, given its contingency; a line with a price of its own keeps it. Unrounded minor units in. */
-export function pricedWork(work: LineWork, contingency: D, input: PriceInput): PricedWork {
-  const [direct, overhead] = [directOf(work), overheadOf(work, input)];
+export function pricedWork(work: LineWork, contingency: D, { input, rates }: Pricing): PricedWork {
+  const [hours, labour, direct] = [hoursOf(work), labourOf(work), directOf(work)];
+  const overhead = overheadOf({ hours, labour }, rates.overhead);
   const worked = priceOfCost(direct.plus(overhead).plus(contingency), input.profit);
   const unrounded = work.price_minor === null ? worked : new D(work.price_minor);
-  return { work, direct, overhead, contingency, unrounded, price_minor: roundMinor(unrounded) };
+  return { work, hours, labour, direct, overhead, contingency, unrounded, price_minor: roundMinor(unrounded) };
 }

@@ -1,6 +1,7 @@
 import { type GradeHours, labourItems } from '#shared/estimates/price/labour-items';
-import { boughtItem, type CostItem, directOf, hoursOf, type LineWork } from '#shared/estimates/price/line-work';
+import { boughtItem, type CostItem, type LineWork } from '#shared/estimates/price/line-work';
 import type { GoodsShare, PriceGoods, PriceInput } from '#shared/estimates/price/price-input';
+import { priceRates } from '#shared/estimates/price/price-rates';
 import { type WorkKind, workKinds } from '#shared/estimates/price/work-kind';
 import { D } from '#shared/money/decimal';
 import { minorOf } from '#shared/money/minor-of';
@@ -24,9 +25,10 @@ const idOf = ({ memberId, kind }: Place): string => `${memberId ?? 'general'}/${
 /** What goes to one line is weighed together, so that each line is within one minor unit of its exact share. */
 export function sharesByLine(goods: Pick<PriceGoods, 'shares'>): GoodsShare[] {
   const lines = new Map<string, GoodsShare>();
-  for (const share of goods.shares.filter(({ weight }) => weight > 0)) {
-    const weight = (lines.get(idOf(share))?.weight ?? 0) + share.weight;
-    lines.set(idOf(share), { ...share, weight });
+  for (const { memberId, kind, weight } of goods.shares) {
+    if (weight <= 0) continue;
+    const id = idOf({ memberId, kind });
+    lines.set(id, { memberId, kind, weight: (lines.get(id)?.weight ?? 0) + weight });
   }
   return lines.size > 0 ? [...lines.values()] : [{ memberId: null, kind: 'other', weight: 1 }];
 }
@@ -45,9 +47,12 @@ function shareOut(goods: PriceGoods, digits: number, placeFor: PlaceFor): void {
 function gathered(input: PriceInput): Gathered[] {
   const places = new Map<string, Gathered>();
   const placeFor: PlaceFor = ({ memberId, kind }) => {
-    const known = places.get(idOf({ memberId, kind })) ?? { memberId, kind, labour: [], goods: [] };
-    places.set(idOf(known), known);
-    return known;
+    const id = idOf({ memberId, kind });
+    const known = places.get(id);
+    if (known) return known;
+    const made = { memberId, kind, labour: [], goods: [] };
+    places.set(id, made);
+    return made;
   };
   for (const entry of input.labour) placeFor(entry).labour.push(entry);
   for (const goods of input.goods) shareOut(goods, input.digits, placeFor);
@@ -67,15 +72,16 @@ function inOrder(places: readonly Gathered[]): Gathered[] {
 
 /** One line for each kind of work of each member, with what stands behind it; lines with nothing behind them are left out. */
 export function workedLines(input: PriceInput): LineWork[] {
+  const rates = priceRates(input);
   const lines = inOrder(gathered(input)).map((place) => ({
     id: idOf(place),
     memberId: place.memberId,
     kind: place.kind,
     name: null,
     taxCategoryId: input.taxCategoryId,
-    items: [...labourItems(place.labour, input), ...place.goods],
+    items: [...labourItems(place.labour, rates), ...place.goods],
     price_minor: null,
     insured_percent: null,
   }));
-  return lines.filter((line) => !directOf(line).isZero() || !hoursOf(line).isZero());
+  return lines.filter((line) => line.items.some(({ cost, hours }) => !cost.isZero() || !hours.isZero()));
 }
