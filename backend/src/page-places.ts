@@ -14,7 +14,7 @@ const places = new Set([
   'jobs',
   'clients',
   'estimates',
-  'rate-cards',
+  'rates',
   'programme',
   'bench',
   'documents',
