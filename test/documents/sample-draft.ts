@@ -4,7 +4,6 @@ import type { Member, MemberOrnament, Zone } from '#shared/estimates/member';
 import type { EstimateSettings } from '#shared/estimates/settings';
 import { startSettings } from '#shared/estimates/start-settings';
 import { shapeDefaults } from '#shared/measure/shape-defaults';
-import type { Shape } from '#shared/measure/shape';
 import { startCard } from '#shared/rate-cards/start-card';
 
 export const zone = (id: string, rest: Partial<Zone> = {}): Zone => ({
@@ -28,12 +27,10 @@ export const zone = (id: string, rest: Partial<Zone> = {}): Zone => ({
 export const ornament = (
   id: string,
   ornamentId: string,
-  extent: OrnamentExtent,
-  rest: Partial<MemberOrnament> = {},
+  rest: Partial<MemberOrnament> & Pick<MemberOrnament, 'extent'>,
 ): MemberOrnament => ({
   id,
   ornamentId,
-  extent,
   size_mm: null,
   relief: 'middle',
   isUndercut: false,
@@ -46,6 +43,8 @@ export const ornament = (
   ...rest,
 });
 
+export const pieces = (count: number): OrnamentExtent => ({ way: 'pieces', count });
+
 export const run = (run_mm: number): OrnamentExtent => ({
   way: 'run',
   run_mm,
@@ -55,14 +54,12 @@ export const run = (run_mm: number): OrnamentExtent => ({
   centre_mm: null,
 });
 
-export const member = (id: string, name: string, shape: Shape, rest: Partial<Member> = {}): Member => ({
+export const member = (id: string, rest: Partial<Member> & Pick<Member, 'name' | 'shape'>): Member => ({
   id,
   pieceId: 'piece-1',
   place: 0,
-  name,
   count: 1,
   timberId: 'lime',
-  shape,
   openings: [],
   zones: [zone(`${id}-zone`)],
   ornaments: [],
@@ -86,59 +83,86 @@ export const settings = (rest: Partial<EstimateSettings> = {}): EstimateSettings
   ...rest,
 });
 
+const topEdge = member('edge', {
+  name: 'Top edge',
+  shape: {
+    kind: 'moulding',
+    profile: [
+      { id: 'fillet-1', element: 'fillet', height_mm: 12, projection_mm: 0, going: 'out' },
+      { id: 'ovolo-1', element: 'ovolo', height_mm: 30, projection_mm: 30, going: 'out' },
+      { id: 'fillet-2', element: 'fillet', height_mm: 5, projection_mm: 3, going: 'out' },
+    ],
+    plan: { form: 'polygon', sides_mm: [480, 1900, 480], turns_degrees: [90, 90], closed: false },
+    measuredAt: 'back',
+    facing: 'outward',
+  },
+  zones: [
+    zone('edge-ovolo', {
+      name: 'Ovolo',
+      take: { way: 'parts', parts: ['ovolo-1'] },
+      relief: 'middle',
+      recutting: 'plain',
+    }),
+    zone('edge-fillets', {
+      name: 'Fillets',
+      take: { way: 'parts', parts: ['fillet-1', 'fillet-2'] },
+      buildUpId: 'water-matte',
+    }),
+  ],
+  ornaments: [ornament('edge-egg', 'egg-and-dart', { extent: run(2860), zoneId: 'edge-ovolo' })],
+});
+
+const leg = member('leg', {
+  name: 'Leg, heron',
+  shape: shapeDefaults('cabriole'),
+  count: 4,
+  zones: [zone('leg-all', { relief: 'high', laying: { way: 'patches', strips: null, cuts: null } })],
+  ornaments: [
+    ornament('leg-block', 'leg-from-block', { extent: pieces(1) }),
+    ornament('leg-leaf', 'acanthus-leaf', { extent: pieces(2), isUndercut: true, zoneId: 'leg-all' }),
+  ],
+});
+
+const stretcher = member('stretcher', {
+  name: 'Stretcher',
+  shape: shapeDefaults('turned'),
+  count: 2,
+  zones: [zone('stretcher-all', { buildUpId: 'oil-12-hour', leafId: 'gold-22-loose' })],
+  ornaments: [ornament('stretcher-bead', 'bead-and-reel', { extent: run(700) })],
+});
+
 /** A base of three members: a moulded top edge with egg and dart, carved legs, a stretcher in oil gilding. */
 export const smallDraft = (rest: Partial<EstimateSettings> = {}): Draft => ({
   settings: settings(rest),
   pieces: [{ id: 'piece-1', name: 'Pier table', place: 0, note: '' }],
-  members: [
-    member(
-      'edge',
-      'Top edge',
-      {
-        kind: 'moulding',
-        profile: [
-          { id: 'fillet-1', element: 'fillet', height_mm: 12, projection_mm: 0, going: 'out' },
-          { id: 'ovolo-1', element: 'ovolo', height_mm: 30, projection_mm: 30, going: 'out' },
-          { id: 'fillet-2', element: 'fillet', height_mm: 5, projection_mm: 3, going: 'out' },
-        ],
-        plan: { form: 'polygon', sides_mm: [480, 1900, 480], turns_degrees: [90, 90], closed: false },
-        measuredAt: 'back',
-        facing: 'outward',
-      },
-      {
-        zones: [
-          zone('edge-ovolo', {
-            name: 'Ovolo',
-            take: { way: 'parts', parts: ['ovolo-1'] },
-            relief: 'middle',
-            recutting: 'plain',
-          }),
-          zone('edge-fillets', {
-            name: 'Fillets',
-            take: { way: 'parts', parts: ['fillet-1', 'fillet-2'] },
-            buildUpId: 'water-matte',
-          }),
-        ],
-        ornaments: [ornament('edge-egg', 'egg-and-dart', run(2860), { zoneId: 'edge-ovolo' })],
-      },
-    ),
-    member('leg', 'Leg, heron', shapeDefaults('cabriole'), {
-      count: 4,
-      zones: [zone('leg-all', { relief: 'high', laying: { way: 'patches', strips: null, cuts: null } })],
-      ornaments: [
-        ornament('leg-block', 'leg-from-block', { way: 'pieces', count: 1 }),
-        ornament('leg-leaf', 'acanthus-leaf', { way: 'pieces', count: 2 }, { isUndercut: true, zoneId: 'leg-all' }),
-      ],
-    }),
-    member('stretcher', 'Stretcher', shapeDefaults('turned'), {
-      count: 2,
-      zones: [zone('stretcher-all', { buildUpId: 'oil-12-hour', leafId: 'gold-22-loose' })],
-      ornaments: [ornament('stretcher-bead', 'bead-and-reel', run(700))],
-    }),
-  ],
+  members: [topEdge, leg, stretcher],
 });
 
 const shapes = ['moulding', 'cabriole', 'turned', 'straight-leg', 'rectangle', 'bun-foot', 'band', 'box'] as const;
+
+function longMember(index: number, pieceId: string): Member {
+  const id = `member-${index + 1}`;
+  const share = (share_percent: number) => ({ take: { way: 'share', share_percent } }) as const;
+  return member(id, {
+    name: `Element ${index + 1}, ąćęłńóśźż`,
+    shape: shapeDefaults(shapes[index % shapes.length]),
+    pieceId,
+    count: 1 + (index % 3),
+    timberId: index % 4 === 0 ? 'oak' : 'lime',
+    zones: [
+      zone(`${id}-a`, { name: 'Highs', ...share(50), relief: 'middle' }),
+      zone(`${id}-b`, { name: 'Grounds', ...share(30), buildUpId: 'water-matte' }),
+      zone(`${id}-c`, { name: 'Back', ...share(20), buildUpId: 'oil-quick', leafId: 'gold-22-loose' }),
+    ],
+    ornaments: [
+      ornament(`${id}-o`, index % 2 === 0 ? 'acanthus-leaf' : 'rosette', {
+        extent: pieces(1 + (index % 5)),
+        zoneId: `${id}-a`,
+      }),
+      ornament(`${id}-r`, 'bead-and-reel', { extent: run(600 + 7 * index), zoneId: `${id}-a` }),
+    ],
+  });
+}
 
 /** A draft as long as wanted: members of all sorts of shapes, three zones each in three build-ups. */
 export const longDraft = (members: number, rest: Partial<EstimateSettings> = {}): Draft => ({
@@ -147,27 +171,7 @@ export const longDraft = (members: number, rest: Partial<EstimateSettings> = {})
     { id: 'piece-1', name: 'Konsola złocona', place: 0, note: '' },
     { id: 'piece-2', name: 'Cabinet stand', place: 1, note: '' },
   ],
-  members: Array.from({ length: members }, (_, index) => {
-    const id = `member-${index + 1}`;
-    const share = (share_percent: number) => ({ take: { way: 'share', share_percent } }) as const;
-    return member(id, `Element ${index + 1}, ąćęłńóśźż`, shapeDefaults(shapes[index % shapes.length]), {
-      pieceId: index < members / 2 ? 'piece-1' : 'piece-2',
-      count: 1 + (index % 3),
-      timberId: index % 4 === 0 ? 'oak' : 'lime',
-      zones: [
-        zone(`${id}-a`, { name: 'Highs', ...share(50), relief: 'middle' }),
-        zone(`${id}-b`, { name: 'Grounds', ...share(30), buildUpId: 'water-matte' }),
-        zone(`${id}-c`, { name: 'Back', ...share(20), buildUpId: 'oil-quick', leafId: 'gold-22-loose' }),
-      ],
-      ornaments: [
-        ornament(
-          `${id}-o`,
-          index % 2 === 0 ? 'acanthus-leaf' : 'rosette',
-          { way: 'pieces', count: 1 + (index % 5) },
-          { zoneId: `${id}-a` },
-        ),
-        ornament(`${id}-r`, 'bead-and-reel', run(600 + 7 * index), { zoneId: `${id}-a` }),
-      ],
-    });
-  }),
+  members: Array.from({ length: members }, (_, index) =>
+    longMember(index, index < members / 2 ? 'piece-1' : 'piece-2'),
+  ),
 });

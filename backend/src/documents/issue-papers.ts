@@ -5,7 +5,7 @@ import type { Snapshot } from '#shared/estimates/snapshot';
 import { currencyDigits } from '#shared/money/currency-digits';
 import { estimatePaper } from './estimate/estimate-paper';
 import { fileName } from './file-names';
-import type { IssuePaper } from './issue-paper';
+import type { PaperFile } from '../estimates';
 import { leafOrderList } from './leaf-order/leaf-order-list';
 import { leafOrderPaper } from './leaf-order/leaf-order-paper';
 import { paperWords } from './paper-words';
@@ -35,7 +35,7 @@ async function bytesOf(snapshot: Snapshot, logo: Buffer | null): Promise<Readonl
  * The papers of an issue, from nothing but the issue and the picture of the letterhead (PNG or JPEG): no clock, no chance, equal bytes for
  * equal content. The workbook and the leaf order show what things cost, and are not for clients.
  */
-export async function issuePapers(snapshot: Snapshot, logo: Buffer | null): Promise<IssuePaper[]> {
+export async function issuePapers(snapshot: Snapshot, logo: Buffer | null): Promise<PaperFile[]> {
   const bytes = await bytesOf(snapshot, logo);
   const { number, letter } = snapshot.estimate;
   return (Object.keys(media) as Paper[]).map((paper) => {

@@ -3,7 +3,7 @@ import type { DryLot } from '#shared/estimates/dry-figures';
 import type { UseFigures, ZoneFigures } from '#shared/estimates/figures';
 import type { Member, Piece } from '#shared/estimates/member';
 import type { Finding } from '#shared/words/finding';
-import type { BenchSheetRequest } from '../bench-sheet-request';
+import type { BenchSheetRequest } from '../../estimates';
 import { paperWords, type PaperWords } from '../paper-words';
 
 /** One piece with everything worked on it, ready to be written for the bench. */

@@ -1,7 +1,7 @@
 import type { FindingKind } from '#shared/words/finding';
 import type { WordCode } from '#shared/words/word-code';
 import { addressBlock } from '../address-block';
-import type { BenchSheetRequest } from '../bench-sheet-request';
+import type { BenchSheetRequest } from '../../estimates';
 import { finishedPaper } from '../paper/finished-paper';
 import type { Block } from '../paper/flow';
 import { listBlock } from '../paper/list-blocks';

@@ -5,7 +5,7 @@ import { figureRows, figureWidth } from '../paper/figure-rows';
 import type { Block } from '../paper/flow';
 import type { Pdf } from '../paper/open-paper';
 import { textStyles } from '../paper/paper-look';
-import { headingBlock, sectionBlocks } from '../paper/section-blocks';
+import { partBlocks, sectionBlocks } from '../paper/section-blocks';
 import { tableBlock, type TableRow } from '../paper/table-block';
 import type { BenchContent } from './bench-content';
 
@@ -86,7 +86,7 @@ function lotParts(pdf: Pdf, content: BenchContent, { lot, used }: BenchContent['
     ? [{ figure: drawnStrip(pdf, used, { words: content.words, width_pt }), caption: '', note: '' }]
     : [];
   const parts = [...figureRows(pdf, strip, 2), ...(lot.steps.length > 0 ? [stepsTable(pdf, lot, content)] : [])];
-  return parts.length === 0 ? [] : [headingBlock(pdf, lot.buildUp, parts[0], 'H3'), ...parts];
+  return partBlocks(pdf, lot.buildUp, parts);
 }
 
 /** What is coated together: the section of each build-up, its steps with coats, hands-on hours and windows in the shop's air. */

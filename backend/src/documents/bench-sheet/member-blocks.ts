@@ -5,7 +5,7 @@ import { figureRows, figureWidth } from '../paper/figure-rows';
 import type { Block } from '../paper/flow';
 import type { Pdf } from '../paper/open-paper';
 import { textStyles } from '../paper/paper-look';
-import { headingBlock, sectionBlocks } from '../paper/section-blocks';
+import { partBlocks, sectionBlocks } from '../paper/section-blocks';
 import { tableBlock, type TableRow } from '../paper/table-block';
 import { textBlock } from '../paper/text-block';
 import type { BenchContent } from './bench-content';
@@ -113,7 +113,7 @@ function memberParts(pdf: Pdf, content: BenchContent, member: Member): Block[] {
     ...zoneTable(pdf, content, member),
     ...figureRows(pdf, plans, 1),
   ];
-  return [headingBlock(pdf, member.name, parts[0], 'H3'), ...parts];
+  return partBlocks(pdf, member.name, parts);
 }
 
 /** Every member of the piece: drawings with all dimensions, ornament with its fitted pitch, zones with leaf and how it is laid. */

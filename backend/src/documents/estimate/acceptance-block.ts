@@ -1,7 +1,7 @@
 import type { Block, Flow } from '../paper/flow';
 import type { Pdf } from '../paper/open-paper';
 import { paperColours, textStyles } from '../paper/paper-look';
-import { headingBlock } from '../paper/section-blocks';
+import { sectionBlocks } from '../paper/section-blocks';
 import { textBlock, widthOf } from '../paper/text-block';
 import { writeLine } from '../paper/text-lines';
 import type { IssueContent } from './issue-content';
@@ -40,5 +40,5 @@ export function acceptanceBlocks(pdf: Pdf, { snapshot, words }: IssueContent): B
       drawSigning(flow, labels);
     },
   };
-  return [headingBlock(pdf, words.say('paper-acceptance'), whole), whole];
+  return sectionBlocks(pdf, words.say('paper-acceptance'), [whole]);
 }

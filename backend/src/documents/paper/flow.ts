@@ -68,7 +68,7 @@ export class Flow {
   /** Everything that is written meanwhile stands under this tag. */
   inside(tag: string, write: () => void, options: TagOptions = {}): void {
     const outer = this.parent;
-    const element = this.pdf.struct(tag, options as object);
+    const element = this.pdf.struct(tag, options);
     outer.add(element);
     this.parent = element;
     write();

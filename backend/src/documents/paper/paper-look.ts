@@ -21,9 +21,12 @@ export interface TextStyle {
   readonly colour: string;
 }
 
-const style = (font: PaperFont, size_pt: number, leading_pt: number, colour: string = paperColours.ink): TextStyle => ({
-  ...{ font, size_pt, leading_pt, colour },
+const style = (font: PaperFont, size_pt: number, leading_pt: number): TextStyle => ({
+  ...{ font, size_pt, leading_pt },
+  colour: paperColours.ink,
 });
+
+const muted = (plain: TextStyle): TextStyle => ({ ...plain, colour: paperColours.muted });
 
 /** The few styles all papers are set in. */
 export const textStyles = {
@@ -33,11 +36,11 @@ export const textStyles = {
   body: style('text', 10, 14),
   strong: style('bold', 10, 14),
   medium: style('medium', 10, 14),
-  note: style('text', 8.5, 11.5, paperColours.muted),
-  columnHead: style('medium', 8.5, 11.5, paperColours.muted),
+  note: muted(style('text', 8.5, 11.5)),
+  columnHead: muted(style('medium', 8.5, 11.5)),
   sum: style('bold', 12, 16),
-  foot: style('text', 8, 10, paperColours.muted),
-  dimension: style('text', 7, 9, paperColours.muted),
+  foot: muted(style('text', 8, 10)),
+  dimension: muted(style('text', 7, 9)),
 } as const;
 
 /** Space of a page round its contents, in points: 20 mm at the sides, room for the foot below. */

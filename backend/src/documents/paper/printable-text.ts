@@ -1,5 +1,4 @@
 /** Control characters have no shape and could only do harm. */
-// eslint-disable-next-line no-control-regex -- these are the characters meant
 const unprintable =
   /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f\u200b-\u200f\u202a-\u202e\u2060-\u2069\ufeff]/g;
 

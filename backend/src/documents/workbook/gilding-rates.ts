@@ -33,16 +33,19 @@ function stepRates(rates: RatesSheet, facts: WorkbookFacts): GildingRates['step'
   const unit = words.say('sheet-unit-hours-a-square-metre');
   const used = [...new Set(prepared.work.zones.flatMap(({ buildUp }) => (buildUp ? [buildUp] : [])))];
   rates.part(words.say('sheet-rates-steps'));
-  const names = new Map<BuildUpStep, string>();
+  const names = new Map<string, string>();
   for (const buildUp of used) {
     for (const step of buildUp.steps) {
       if (step.work.way !== 'area') continue;
       const label = words.say('sheet-step-of', { step: step.name, buildup: buildUp.name });
       const value = step.work.hours_m2;
-      names.set(step, rates.rate({ label, value, unit, name: ['hours_m2', buildUp.id, step.id] }));
+      names.set(
+        `${buildUp.id}/${step.id}`,
+        rates.rate({ label, value, unit, name: ['hours_m2', buildUp.id, step.id] }),
+      );
     }
   }
-  return (_buildUp, step) => names.get(step) ?? '0';
+  return (buildUp, step) => names.get(`${buildUp.id}/${step.id}`) ?? '0';
 }
 
 const byKey = <Key extends string>(keys: readonly Key[], name: (key: Key) => string): Record<Key, string> =>

@@ -5,7 +5,7 @@ import type { GildingRates } from './gilding-rates';
 import { handsOnFormula } from './hands-on-formula';
 import type { LeafPages } from './leaf-sheet';
 import { lotSteps, type NumberedStep } from './lot-steps';
-import { formula, input, Sheet } from './sheet';
+import { formula, input, Sheet, type CellContent } from './sheet';
 import type { TakeOff } from './take-off-sheet';
 import { gradeNumber, lineNumber, type WorkbookFacts } from './workbook-facts';
 
@@ -65,6 +65,16 @@ function stepRow(
 const numberOfStep = (steps: readonly NumberedStep[], zone: WorkedZone, stepId: string): number =>
   steps.find(({ lot, step }) => step.stepId === stepId && lot.zoneIds.includes(zone.zone.id))?.number ?? 0;
 
+/** Which grades have hours on which lines. */
+function workedPairs(sheet: Sheet, from: number): GildingPage['hasHours'] {
+  const pairs = new Map<CellContent, Set<CellContent>>();
+  for (const { cells } of sheet.rows.slice(from - 1)) {
+    const grades = pairs.get(cells[at.line - 1]) ?? new Set();
+    pairs.set(cells[at.line - 1], grades.add(cells[at.grade - 1]));
+  }
+  return (line, grade) => pairs.get(line)?.has(grade) ?? false;
+}
+
 /** Hours by step: areas, leaves and coats times what the rates say. */
 export function gildingSheet(facts: WorkbookFacts, parts: GildingParts): GildingPage {
   const { words, prepared } = facts;
@@ -85,11 +95,10 @@ export function gildingSheet(facts: WorkbookFacts, parts: GildingParts): Gilding
   }
   const to = Math.max(from, sheet.rows.length);
   const span = (column: number) => sheet.span(column, from, to);
-  const pairs = new Set(sheet.rows.slice(from - 1).map(({ cells }) => `${cells[at.line - 1]}/${cells[at.grade - 1]}`));
   return {
     sheet,
     hoursOnLine: (line, grade) => `SUMIFS(${span(at.hours)},${span(at.line)},${line},${span(at.grade)},${grade})`,
     hoursOfStep: (step) => `SUMIFS(${span(at.hours)},${span(at.lotStep)},${step})`,
-    hasHours: (line, grade) => pairs.has(`${line}/${grade}`),
+    hasHours: workedPairs(sheet, from),
   };
 }

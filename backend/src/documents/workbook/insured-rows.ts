@@ -18,51 +18,49 @@ function loadFormula(page: PricePage, { priced }: NumberedLine): string {
   return priceOfCostFormula(page, `${percent}/100*(1+${contingencyShare(page)})`);
 }
 
+/** The lines that insure the price, the others, and where the prices of those stand. */
+export interface InsuredLines {
+  readonly insured: readonly NumberedLine[];
+  readonly others: readonly NumberedLine[];
+  readonly prices: string;
+}
+
+const blanks = (count: number): CellContent[] => Array.from({ length: count }, () => null);
+
 /** The value insured: the whole price, insurance included. V = S ÷ (1 − load), S being the prices of the other lines. */
-function valueRow(
-  page: PricePage,
-  insured: readonly NumberedLine[],
-  others: readonly NumberedLine[],
-  span: string,
-): string {
+function valueRow(page: PricePage, { insured, others, prices }: InsuredLines): string {
   const { sheet, columns, facts } = page;
   const load = insured.map((line) => loadFormula(page, line)).join('+');
-  const sum = minorOfAmount(`SUM(${span})`, facts.price.digits);
+  const sum = minorOfAmount(`SUM(${prices})`, facts.price.digits);
   const others_minor = sumMinor(others.map(({ priced }) => priced.price_minor));
   const works = insured.map(({ priced }) => priced.work);
   const value = insuredValue(others_minor, works, facts.price)?.toNumber() ?? 0;
-  const blanks = Array.from({ length: columns.direct - 4 }, () => null);
   const row = sheet.next;
   const label = facts.words.say('sheet-value-insured');
-  sheet.add([null, null, label, ...blanks, formula(`IF(${load}>=1,0,${sum}/(1-(${load})))`, value)]);
-  return sheet.here(columns.direct, row);
+  const text = `IF(${load}>=1,0,${sum}/(1-(${load})))`;
+  // Beside the costs, which are summed, and not among them.
+  sheet.add([null, null, label, ...blanks(columns.labour - 4), formula(text, value)]);
+  return sheet.here(columns.labour, row);
 }
 
-/** Lines that insure the price itself, once the others stand above them. */
-export function insuredRows(
-  page: PricePage,
-  lines: { insured: readonly NumberedLine[]; others: readonly NumberedLine[] },
-  span: string,
-): void {
+function insuredRow(page: PricePage, { priced, number }: NumberedLine, value: string): void {
+  const { sheet, columns, facts, extras } = page;
+  const row = sheet.next;
+  const [direct, contingency] = [sheet.here(columns.direct, row), sheet.here(columns.contingency, row)];
+  const price = roundedAmount(priceOfCostFormula(page, `${direct}+${contingency}`), facts.price.digits);
+  sheet.add([
+    ...[number, '', priced.work.name ?? '', taxNumber(facts, priced.work.taxCategoryId)],
+    ...blanks(columns.direct - columns.firstGrade),
+    formula(`${value}*${extras.insured(priced.work.id)}/100`, priced.direct.toNumber()),
+    ...blanks(columns.contingency - columns.overhead),
+    formula(`${direct}*${contingencyShare(page)}`, priced.contingency.toNumber()),
+    formula(price, amountOf(page, priced.price_minor)),
+  ]);
+}
+
+/** Lines that insure the price itself, once the others stand above them. The row of the value is no line, and has no price. */
+export function insuredRows(page: PricePage, lines: InsuredLines): void {
   if (lines.insured.length === 0) return;
-  const { sheet, columns, facts } = page;
-  const value = valueRow(page, lines.insured, lines.others, span);
-  for (const line of lines.insured) {
-    const { priced, number } = line;
-    const row = sheet.next;
-    const direct = sheet.here(columns.direct, row);
-    const contingency = sheet.here(columns.contingency, row);
-    const blanks = (count: number): CellContent[] => Array.from({ length: count }, () => null);
-    const cost = formula(`${value}*${page.extras.insured(priced.work.id)}/100`, priced.direct.toNumber());
-    const own = formula(`${direct}*${contingencyShare(page)}`, priced.contingency.toNumber());
-    const price = roundedAmount(priceOfCostFormula(page, `${direct}+${contingency}`), facts.price.digits);
-    sheet.add([
-      ...[number, '', priced.work.name ?? '', taxNumber(facts, priced.work.taxCategoryId)],
-      ...blanks(columns.direct - columns.firstGrade),
-      cost,
-      ...blanks(columns.contingency - columns.overhead),
-      own,
-      formula(price, amountOf(page, priced.price_minor)),
-    ]);
-  }
+  const value = valueRow(page, lines);
+  for (const line of lines.insured) insuredRow(page, line, value);
 }

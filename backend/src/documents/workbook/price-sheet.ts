@@ -39,7 +39,7 @@ function allLines(page: PricePage): { firstRow: number; lastRow: number } {
   if (others.length === 0) sheet.add([]);
   if (isRisk) setThreshold(page, place);
   const prices = `${sheet.here(columns.price, firstRow)}:${sheet.here(columns.price, sheet.rows.length)}`;
-  insuredRows(page, { insured, others }, prices);
+  insuredRows(page, { insured, others, prices });
   return { firstRow, lastRow: sheet.rows.length };
 }
 

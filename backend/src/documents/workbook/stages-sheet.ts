@@ -95,45 +95,49 @@ function shareRow(
   return sheet.here(at.paid, row);
 }
 
-/** The plan of payment: stages as differences of rounded cumulative amounts, the deposit recovered, the retention released. */
-export function stagesSheet(facts: WorkbookFacts, gross: string): Sheet {
-  const { words, price, settings, snapshot } = facts;
-  const { say } = words;
+function emptySheet({ words: { say }, price, snapshot }: WorkbookFacts): Sheet {
   const figure = { width: 17, format: amountFormat(price.digits) };
   const percent = { width: 10, format: '0.####' };
-  const sheet = new Sheet(say('sheet-stages'), [
-    { width: 46, format: '' },
-    percent,
-    percent,
-    figure,
-    figure,
-    figure,
-    figure,
-  ]);
+  const columns = [{ width: 46, format: '' }, percent, percent, figure, figure, figure, figure];
+  const sheet = new Sheet(say('sheet-stages'), columns);
   sheet.head(say('sheet-stages'), say('sheet-stages-note', { currency: snapshot.workshop.currency }), [
     ...[say('paper-column-stage'), '%', say('sheet-head-reached'), say('paper-column-worth')],
     ...[say('paper-column-recovered'), say('paper-column-retained'), say('paper-column-paid')],
   ]);
-  const { stages } = snapshot.figures;
+  return sheet;
+}
+
+/** Everything that is paid, which is the contract. */
+function totalRow(page: StagesPage, first: number): void {
+  const { sheet, facts, deposit } = page;
+  const paid = `SUM(${sheet.here(at.paid, first)}:${sheet.here(at.paid, sheet.rows.length)})`;
+  const { sum_minor } = paymentRows(facts.settings.stages, facts.snapshot.figures.stages);
+  const total = roundedMinor(`(${deposit}+${paid})*${10 ** facts.price.digits}`);
+  const blanks = Array.from({ length: at.paid - 2 }, () => null);
+  sheet.add(
+    [facts.words.say('paper-total'), ...blanks, formula(inCurrency(page, total), amount(page, sum_minor))],
+    'sum',
+  );
+}
+
+/** The plan of payment: stages as differences of rounded cumulative amounts, the deposit recovered, the retention released. */
+export function stagesSheet(facts: WorkbookFacts, gross: string): Sheet {
+  const { words, settings, snapshot } = facts;
+  const { deposit_minor, releases_minor } = snapshot.figures.stages;
+  const sheet = emptySheet(facts);
   const base = { sheet, facts, gross };
-  const deposit = shareRow(base, say('paper-stage-deposit'), {
+  const deposit = shareRow(base, words.say('paper-stage-deposit'), {
     percent: settings.stages.deposit_percent,
-    amount_minor: stages.deposit_minor,
+    amount_minor: deposit_minor,
   });
-  const depositRow = sheet.rows.length;
-  const retained_minor = stages.releases_minor[0] + stages.releases_minor[1];
-  const retention = shareRow(base, say('sheet-retention'), {
+  const retention = shareRow(base, words.say('sheet-retention'), {
     percent: settings.stages.retention_percent,
-    amount_minor: retained_minor,
+    amount_minor: releases_minor[0] + releases_minor[1],
   });
   const page: StagesPage = { ...base, deposit, retention };
   const first = sheet.next;
   stageRows(page);
   releaseRows(page);
-  const paid = `SUM(${sheet.here(at.paid, first)}:${sheet.here(at.paid, sheet.rows.length)})`;
-  const { sum_minor } = paymentRows(settings.stages, stages);
-  const total = roundedMinor(`(${sheet.here(at.paid, depositRow)}+${paid})*${10 ** price.digits}`);
-  const blanks = Array.from({ length: at.paid - 2 }, () => null);
-  sheet.add([say('paper-total'), ...blanks, formula(inCurrency(page, total), amount(page, sum_minor))], 'sum');
+  totalRow(page, first);
   return sheet;
 }
