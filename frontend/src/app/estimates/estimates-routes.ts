@@ -1,6 +1,6 @@
 import type { Routes } from '@angular/router';
 import { roleGuard } from '../core/session/role-guard';
-import { leaveGuard } from '../ui/dialog/leave-guard';
+import { keptGuard } from './workspace/kept-guard';
 
 const seesPrices = roleGuard('owner', 'estimator', 'office');
 
@@ -9,7 +9,7 @@ export const estimatesRoutes: Routes = [
   {
     path: ':estimateId',
     loadComponent: () => import('./workspace/workspace-page').then(({ WorkspacePage }) => WorkspacePage),
-    canDeactivate: [leaveGuard],
+    canDeactivate: [keptGuard],
     children: [
       { path: '', pathMatch: 'full', redirectTo: 'measure' },
       {

@@ -1,5 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
-import { MatIconButton } from '@angular/material/button';
+import { MatButton, MatIconButton } from '@angular/material/button';
 import { MatMenu, MatMenuItem, MatMenuTrigger } from '@angular/material/menu';
 import { Formats } from '../core/formats/formats';
 import { MemberPicture, ShapeForm } from '../measure';
@@ -25,6 +25,7 @@ import { MemberPlace } from './places/member-place';
     EntryAt,
     FindingList,
     Icon,
+    MatButton,
     MatIconButton,
     MatMenu,
     MatMenuItem,
@@ -54,6 +55,12 @@ export class MeasurePage {
     const girth = figures?.girth_mm ? $localize`girth ${this.formats.length(figures.girth_mm)}:girth:` : '';
     const run = figures?.run_mm ? $localize`run ${this.formats.length(figures.run_mm)}:run:` : '';
     return [figures?.timber, girth, run].filter(Boolean).join(', ');
+  });
+  /** The alternative a member belongs to, as long as it is not the one shown. */
+  protected readonly alternative = computed(() => {
+    const id = this.selection.member()?.alternativeId ?? '';
+    if (this.store.choice().includes(id)) return undefined;
+    return this.store.settings()?.alternatives.find((alternative) => alternative.id === id);
   });
   /** What there is to tell about this member, its zones and openings. */
   protected readonly findings = computed(() => {

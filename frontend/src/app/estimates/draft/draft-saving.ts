@@ -1,4 +1,4 @@
-import { DOCUMENT, ErrorHandler, Injectable, computed, effect, inject, signal } from '@angular/core';
+import { DOCUMENT, DestroyRef, ErrorHandler, Injectable, computed, effect, inject, signal } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import {
   EMPTY,
@@ -69,6 +69,7 @@ export class DraftSaving {
 
   constructor() {
     this.saving.reset();
+    inject(DestroyRef).onDestroy(() => this.saving.reset());
     effect(() => this.saving.expect(this.draft.unsentCount() + this.unfinished.ids().size));
     const typed = this.draft.edited.pipe(debounceTime(afterTheLastKey_ms));
     const hidden = fromEvent(this.window.document, 'visibilitychange').pipe(

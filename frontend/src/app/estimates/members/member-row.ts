@@ -28,9 +28,10 @@ export class MemberRows {
   }
 }
 
-/** The shape and the first ornament: “moulding, egg and dart”. */
+/** The shape and the first ornament, “moulding, egg and dart”, after the alternative it belongs to. */
 function aboutOf(member: Member, store: EstimateStore): string {
   const use = store.figures()?.uses.find(({ memberId }) => memberId === member.id);
+  const alternative = store.settings()?.alternatives.find(({ id }) => id === member.alternativeId);
   const shape = shapeNames[member.shape.kind].toLowerCase();
-  return use ? `${shape}, ${use.ornament.toLowerCase()}` : shape;
+  return [alternative?.name, shape, use?.ornament.toLowerCase()].filter(Boolean).join(', ');
 }

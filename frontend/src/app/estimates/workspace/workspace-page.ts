@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, input, viewChild } from '@angular/core';
 import type { OpenEstimate } from '../estimate-store';
 import { Workspace } from './workspace';
 
@@ -17,5 +17,12 @@ export class WorkspacePage {
   readonly jobId = input.required<string>();
   readonly estimateId = input.required<string>();
 
+  private readonly workspace = viewChild(Workspace);
+
   protected readonly open = computed<OpenEstimate>(() => ({ jobId: this.jobId(), estimateId: this.estimateId() }));
+
+  /** Sends what is unsent, and waits for it a moment. */
+  async keep(): Promise<void> {
+    await this.workspace()?.keep();
+  }
 }

@@ -24,6 +24,8 @@ import { EstimateTally } from './estimate-tally';
 import { WorkspaceNews } from './workspace-news';
 import { workspaceProviders } from './workspace-providers';
 
+const longestWait_ms = 2000;
+
 /** What stands round every place of an estimate: its name, how it is kept, the tally as the way through, and the place itself. */
 @Component({
   selector: 'app-workspace',
@@ -66,6 +68,11 @@ export class Workspace implements OnInit {
 
   constructor() {
     effect(() => this.title?.name(this.heading() || undefined));
+  }
+
+  /** Sends what is unsent, and waits for it a moment; an absent server is not waited for. */
+  async keep(): Promise<void> {
+    await Promise.race([this.store.flush(), new Promise((resolve) => setTimeout(resolve, longestWait_ms))]);
   }
 
   ngOnInit(): void {
