@@ -1,10 +1,15 @@
 import { Injectable, computed, inject, signal } from '@angular/core';
 import { takeUntilDestroyed, toObservable } from '@angular/core/rxjs-interop';
-import { debounceTime, of, switchMap } from 'rxjs';
+import { type Observable, debounceTime, map, of, switchMap } from 'rxjs';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import { canonicalJson } from '#shared/estimates/canonical-json';
 import type { Choice } from '#shared/estimates/draft';
-import { type EstimateInput, estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
+import {
+  type EstimateInput,
+  type PreparedEstimate,
+  estimateFigures,
+  prepareEstimate,
+} from '#shared/estimates/estimate-figures';
 import type { Figures, PricedFigures, WorkFigures } from '#shared/estimates/figures';
 import type { Risk } from '#shared/estimates/risk/risk';
 import type { RateCard } from '#shared/rate-cards/rate-card';
@@ -23,6 +28,11 @@ export interface WorkedWith {
   readonly currency: string;
 }
 
+/** The risk that was drawn, and which working of the draft it is of. */
+interface DrawnFor extends Drawn {
+  readonly of: PreparedEstimate;
+}
+
 const afterTheLastKey_ms = 300;
 
 const isWhole = (figures: ReaderFigures): figures is Figures => 'cost' in figures;
@@ -36,7 +46,7 @@ export class LiveFigures {
   private readonly server = signal<ReaderFigures | undefined>(undefined);
   private readonly worked = signal<WorkedWith | undefined>(undefined);
   private readonly chosen = signal<Choice>([]);
-  private readonly drawn = signal<Drawn | undefined>(undefined);
+  private readonly drawn = signal<DrawnFor | undefined>(undefined);
 
   readonly choice = this.chosen.asReadonly();
   /** Whether what is shown was worked here and not yet by the server. */
@@ -47,9 +57,6 @@ export class LiveFigures {
     const input = this.input(this.chosen());
     return input && this.isOwn() ? prepareEstimate(input) : undefined;
   });
-  private readonly asked = computed(() => this.prepared()?.risk, {
-    equal: (one, other) => one === other || canonicalJson(one) === canonicalJson(other),
-  });
   private readonly risk = computed(() => this.drawn()?.risk ?? this.serverRisk());
 
   readonly figures = computed<ReaderFigures | undefined>(() => {
@@ -57,9 +64,9 @@ export class LiveFigures {
     return prepared ? estimateFigures(prepared, this.risk()) : this.server();
   });
   /** Risk is being drawn for what was just typed; until then it is that of a moment ago. */
-  readonly isRiskPending = computed(() => this.asked() !== undefined && this.drawn()?.input !== this.asked());
+  readonly isRiskPending = computed(() => this.prepared() !== undefined && this.drawn()?.of !== this.prepared());
   /** The price itself waits for risk, since contingency is taken from it. */
-  readonly isPricePending = computed(() => this.isRiskPending() && this.prepared()?.needsRisk === true);
+  readonly isPricePending = computed(() => this.prepared()?.needsRisk === true && this.isRiskPending());
   /** The server works with another calculator than this page does. */
   readonly isOutdated = computed(() => {
     const server = this.server();
@@ -67,10 +74,10 @@ export class LiveFigures {
   });
 
   constructor() {
-    toObservable(this.asked)
+    toObservable(this.prepared)
       .pipe(
         debounceTime(afterTheLastKey_ms),
-        switchMap((input) => (input ? drawnBy(this.startRisk, input) : of(undefined))),
+        switchMap((prepared) => (prepared ? this.draw(prepared) : of(undefined))),
         takeUntilDestroyed(),
       )
       .subscribe((drawn) => this.drawn.set(drawn));
@@ -106,5 +113,13 @@ export class LiveFigures {
   private serverRisk(): Risk | null {
     const server = this.server();
     return server && isWhole(server) ? server.cost.risk : null;
+  }
+
+  /** Nothing is drawn twice: a new name, say, changes no risk. */
+  private draw(prepared: PreparedEstimate): Observable<DrawnFor> {
+    const before = this.drawn();
+    const input = prepared.risk;
+    if (before && canonicalJson(before.input) === canonicalJson(input)) return of({ ...before, of: prepared });
+    return drawnBy(this.startRisk, input).pipe(map((drawn) => ({ ...drawn, of: prepared })));
   }
 }
