@@ -75,8 +75,9 @@ const waterSteps = ['lay', 'fault', 'second-laying', 'burnish', 'matte-size', 'p
 function placeLot(lot: LotSequence, request: JobRequest, plan: Plan): LotSpan {
   const placed: PlacedTask[] = [];
   for (const block of stepBlocks(lot.steps)) {
-    const notBefore = earliest(lot, { request, plan, placed });
-    const placing = { time: request.time, busy: plan.busy, notBefore };
+    const earliestOf = earliest(lot, { request, plan, placed });
+    const notBefore_minutes = new Map(block.steps.map((step) => [step.stepId, earliestOf(step)]));
+    const placing = { time: request.time, busy: plan.busy, notBefore_minutes };
     const from_minutes = Math.max(endOf(placed), request.ready_minutes[lot.lotId] ?? 0);
     const { tasks, busy, findings } = placedInPortions(block, { lotId: lot.lotId, from_minutes, placing });
     placed.push(...tasks);

@@ -54,7 +54,7 @@ function firstFit(
 
 /** Whether hands with nothing else to do could keep the limits of one portion, on whatever day of the week they start. */
 function isPossible(block: StepBlock, portions: number, { time }: BlockAt['placing']): boolean {
-  const placing: Placing = { time, busy: new Map(), notBefore: () => 0, portions };
+  const placing: Placing = { time, busy: new Map(), notBefore_minutes: new Map(), portions };
   return firstFit(block, { from: 0, to: week_minutes }, placing) !== null;
 }
 
@@ -72,13 +72,21 @@ const withTasks = (busy: BusyGrades, tasks: readonly PlacedCoat[]): BusyGrades =
 };
 
 /** By when everybody is free again and nothing is waited for. */
-function freeFrom(block: StepBlock, from_minutes: number, { busy, notBefore }: Pick<Placing, 'busy' | 'notBefore'>) {
+function freeFrom(block: StepBlock, from_minutes: number, { busy, notBefore_minutes }: BlockAt['placing']): number {
   const ends = block.steps.map(({ gradeId }) => busy.get(gradeId)?.at(-1)?.end_minutes ?? 0);
-  return Math.max(from_minutes, ...ends, ...block.steps.map(notBefore));
+  return Math.max(from_minutes, ...ends, ...notBefore_minutes.values());
 }
 
-/** Each portion keeps clear of those before it, whoever does them, and waits for free hands as long as it takes. */
-function allPortions(block: StepBlock, at: BlockAt, portions: number): Placed | null {
+const endOf = (tasks: readonly PlacedCoat[]): number =>
+  tasks.reduce((latest, task) => Math.max(latest, task.end_minutes), 0);
+
+interface Asked {
+  readonly portions: number;
+  readonly by_minutes: number;
+}
+
+/** Each portion keeps clear of those before it, whoever does them, and waits for free hands as long as it takes; null once it ends too late. */
+function allPortions(block: StepBlock, at: BlockAt, { portions, by_minutes }: Asked): Placed | null {
   const tasks: PlacedTask[] = [];
   let { busy } = at.placing;
   let { from_minutes } = at;
@@ -86,7 +94,7 @@ function allPortions(block: StepBlock, at: BlockAt, portions: number): Placed | 
     const placing: Placing = { ...at.placing, busy, portions };
     const span = { from: from_minutes, to: freeFrom(block, from_minutes, placing) + week_minutes };
     const coats = firstFit(block, span, placing);
-    if (!coats) return null;
+    if (!coats || endOf(coats) > by_minutes) return null;
     for (const coat of coats) tasks.push({ ...coat, lotId: at.lotId, portion });
     busy = withTasks(busy, coats);
     from_minutes = coats[0]?.start_minutes ?? from_minutes;
@@ -104,18 +112,18 @@ function overTime(block: StepBlock, { lotId, from_minutes, placing }: BlockAt): 
   return { tasks, busy: withTasks(placing.busy, coats), findings: [finding] };
 }
 
-const endOf = ({ tasks }: Placed): number => tasks.reduce((latest, task) => Math.max(latest, task.end_minutes), 0);
-
 /** The fewest portions, or a few more where that saves enough; null where no number of them keeps the limits. */
 function soonest(block: StepBlock, at: BlockAt): (Placed & { portions: number }) | null {
   const fewest = fewestPortions(block, at);
   if (fewest === null) return null;
   const most = block.inPortions ? fewest + finerBy : fewest;
   let best: (Placed & { portions: number }) | null = null;
-  for (let portions = fewest; portions <= most; portions += 1) {
-    const placed = allPortions(block, at, portions);
-    if (placed && (!best || endOf(placed) + worth_minutes <= endOf(best))) best = { ...placed, portions };
-    if (best && endOf(best) < at.from_minutes + worth_minutes) break;
+  let by_minutes = Infinity;
+  for (let portions = fewest; portions <= most && by_minutes > at.from_minutes; portions += 1) {
+    const placed = allPortions(block, at, { portions, by_minutes });
+    if (!placed) continue;
+    best = { ...placed, portions };
+    by_minutes = endOf(placed.tasks) - worth_minutes;
   }
   return best;
 }

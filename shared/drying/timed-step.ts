@@ -10,7 +10,8 @@ export type BusyGrades = ReadonlyMap<string, BusySpans>;
 export interface Placing {
   readonly time: WorkingTime;
   readonly busy: BusyGrades;
-  readonly notBefore: (step: SequenceStep) => number;
+  /** How early each step may start, by its id; one that is not named may start at once. */
+  readonly notBefore_minutes: ReadonlyMap<string, number>;
   readonly portions: number;
 }
 
@@ -44,14 +45,17 @@ function lagsTo(step: SequenceStep, steps: readonly SequenceStep[]): LagTo[] {
 }
 
 /** The steps of a block made ready to be placed again and again: minutes rounded up for one coat of one portion. */
-export function timedSteps(steps: readonly SequenceStep[], { time, busy, notBefore, portions }: Placing): TimedStep[] {
+export function timedSteps(
+  steps: readonly SequenceStep[],
+  { time, busy, notBefore_minutes, portions }: Placing,
+): TimedStep[] {
   return steps.map((step) => {
     const handsOn_minutes = countUp(step.handsOn_minutes / step.coats / portions);
     return {
       step,
       handsOn_minutes,
       work_minutes: countUp((handsOn_minutes * 100) / time.productiveShare_percent),
-      notBefore_minutes: notBefore(step),
+      notBefore_minutes: notBefore_minutes.get(step.stepId) ?? 0,
       busy: busy.get(step.gradeId) ?? [],
       lags: lagsTo(step, steps),
     };
