@@ -44,7 +44,7 @@ export class HoursTable {
       text: (row) => this.likely(row),
       explained: this.explained(),
     },
-    { key: 'range', heading: $localize`Low to high`, kind: 'text', text: (row) => this.range(row) },
+    { key: 'range', heading: $localize`Low to high`, kind: 'figure', text: (row) => this.range(row) },
   ]);
   protected readonly totals = computed(() => {
     const hours = tripleSum(this.rows().map((row) => row.hours));

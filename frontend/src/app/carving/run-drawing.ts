@@ -59,6 +59,7 @@ export class RunDrawing {
 
   private wordsOfPart(shown_mm: number, length_mm: number): { words?: string } {
     if (shown_mm >= length_mm) return {};
-    return { words: $localize`${this.formats.length(shown_mm)}:shown: of ${this.formats.length(length_mm)}:length:` };
+    const [shown, whole] = [shown_mm, length_mm].map((each_mm) => this.formats.length(Math.round(each_mm)));
+    return { words: $localize`${shown}:shown: shown of ${whole}:length:` };
   }
 }

@@ -37,7 +37,7 @@ const cuts: readonly EntryChoice[] = [
     </form>
     @if (explained(); as moved) {
       <p>
-        <app-figure [text]="moved.heading" [explained]="moved" />
+        <app-figure [text]="moved.heading" [explained]="moved" />&ngsp;
         <span class="muted" i18n>between shop and site</span>
       </p>
     }

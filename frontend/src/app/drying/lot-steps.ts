@@ -24,8 +24,12 @@ export class LotSteps {
   /** What is to be known about the lot; waits for people stand beside the step that waits. */
   readonly findings = input<readonly Finding[]>([]);
 
+  /** A step that takes no time, neither to do nor to dry, is none here. */
+  private readonly told = computed(() =>
+    this.lot().steps.filter(({ handsOn_minutes, opens_minutes }) => handsOn_minutes > 0 || opens_minutes > 0),
+  );
   protected readonly lines = computed(() =>
-    this.lot().steps.map((step) => ({
+    this.told().map((step) => ({
       id: step.stepId,
       name: step.name,
       coats: this.formats.number(step.coats, 0),

@@ -69,5 +69,5 @@ export const closedBars = (days: number, time: WorkingTime, day_px: number): Rib
 /** Marks of the scale: every day where there is room for its number, else the first of each week. */
 export const ribbonTicks = (days: number, day_px: number): RibbonTick[] =>
   Array.from({ length: days }, (_, index) => ({ x: index * day_px, day: index + 1, isWeek: index % 7 === 0 })).filter(
-    ({ isWeek }) => isWeek || day_px >= 56,
+    ({ x, isWeek }) => (isWeek || day_px >= 56) && x + 40 < days * day_px,
   );

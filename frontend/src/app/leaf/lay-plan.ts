@@ -75,8 +75,13 @@ export class LayPlanDrawing {
     const { plan, view } = this.drawn();
     const [along, ...others] = view.dimensions;
     if (plan.shownLength_mm >= plan.length_mm - 1e-6 || !along) return view;
-    const [shown, whole] = [plan.shownLength_mm, plan.length_mm].map((length_mm) => this.formats.length(length_mm));
-    return { ...view, dimensions: [{ ...along, words: $localize`${shown}:shown: of ${whole}:length:` }, ...others] };
+    const [shown, whole] = [plan.shownLength_mm, plan.length_mm].map((length_mm) =>
+      this.formats.length(Math.round(length_mm)),
+    );
+    return {
+      ...view,
+      dimensions: [{ ...along, words: $localize`${shown}:shown: shown of ${whole}:length:` }, ...others],
+    };
   });
 
   private leaves(): string {

@@ -20,33 +20,34 @@ const cutChoices: readonly EntryChoice[] = [
   ...[1, 2, 3, 4].map((cuts) => ({ value: cuts, label: $localize`${cuts}:cuts: by ${cuts}:cutsAgain:` })),
 ];
 
-/** Which way leaf is laid, with what every number of strips would take and cost. Its entries stand in the grid around it. */
+/** Which way leaf is laid, with what every number of strips would take and cost. */
 @Component({
   selector: 'app-laying-form',
   imports: [Entry, EntryAt, Field, StripOptions],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <app-field i18n-label label="Laid as">
-      <select #way appEntry (change)="turn(way.value)">
-        <option value="proposed" [selected]="present()?.way === 'proposed'">{{ proposal() }}</option>
-        @for (known of ways; track known) {
-          <option [value]="known" [selected]="present()?.way === known">{{ names[known] }}</option>
-        }
-      </select>
-    </app-field>
-    @if (laid()?.way === 'patches') {
-      <app-entry-at
-        way="choice"
-        i18n-label
-        label="A leaf is cut"
-        [choices]="cuts"
-        [form]="form()"
-        [path]="path() + '.cuts'"
-      />
-    }
+    <div class="line">
+      <app-field i18n-label label="Laid as">
+        <select #way appEntry (change)="turn(way.value)">
+          <option value="proposed" [selected]="present()?.way === 'proposed'">{{ proposal() }}</option>
+          @for (known of ways; track known) {
+            <option [value]="known" [selected]="present()?.way === known">{{ names[known] }}</option>
+          }
+        </select>
+      </app-field>
+      @if (laid()?.way === 'patches') {
+        <app-entry-at
+          way="choice"
+          i18n-label
+          label="A leaf is cut"
+          [choices]="cuts"
+          [form]="form()"
+          [path]="path() + '.cuts'"
+        />
+      }
+    </div>
     @if (laid()?.way === 'lays' && options().length > 0) {
       <app-strip-options
-        class="whole"
         [options]="options()"
         [chosen]="present()?.strips ?? null"
         [taken]="laid()?.strips ?? null"
@@ -57,11 +58,19 @@ const cutChoices: readonly EntryChoice[] = [
   `,
   styles: `
     :host {
-      display: contents;
+      display: grid;
+      gap: 8px;
     }
 
-    .whole {
-      grid-column: 1 / -1;
+    .line {
+      display: flex;
+      flex-wrap: wrap;
+      gap: 12px 16px;
+    }
+
+    .line > * {
+      flex: 1 1 200px;
+      max-width: 300px;
     }
   `,
 })
@@ -83,7 +92,7 @@ export class LayingForm {
   protected readonly proposal = computed(() => {
     const laid = this.laid();
     return laid && this.present()?.way === 'proposed'
-      ? $localize`as the shape proposes: ${laidAs(laid)}:laid:`
+      ? $localize`proposed: ${laidAs(laid)}:laid:`
       : $localize`as the shape proposes`;
   });
 

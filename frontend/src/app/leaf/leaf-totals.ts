@@ -33,7 +33,6 @@ type Column = FigureColumn<LeafOfProduct>;
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <app-figure-table
-      captionShown
       i18n-caption
       caption="Leaf of the whole job"
       [columns]="columns()"
@@ -112,7 +111,7 @@ export class LeafTotals {
         ? $localize`a pack of ${booklets}:booklets:`
         : $localize`${count}:count: packs of ${booklets}:booklets:`,
     );
-    const singles = purchase.singles > 0 ? [$localize`${purchase.singles}:booklets: single`] : [];
+    const singles = purchase.singles > 0 ? [$localize`${purchase.singles}:booklets: single booklets`] : [];
     return [...packs, ...singles].join(', ');
   }
 

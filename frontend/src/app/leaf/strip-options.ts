@@ -23,6 +23,13 @@ export class StripOptions {
   readonly picked = output<number | null>();
 
   protected readonly group = `strips-${++count}`;
+  protected readonly summary = computed(() => {
+    const taken = this.formats.number(this.taken() ?? 0, 0);
+    const ways = this.formats.number(this.options().length, 0);
+    return this.chosen() === null
+      ? $localize`${taken}:strips:, the cheapest of ${ways}:ways: ways`
+      : $localize`${taken}:strips:, one of ${ways}:ways: ways`;
+  });
   protected readonly lines = computed(() =>
     this.options().map(({ strips, strip_mm, laysAcross, piecesAlong, leaves, cost }) => ({
       strips,

@@ -1,4 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import type { Finding } from '#shared/words/finding';
 import { EstimateStore } from '../estimate-store';
 import { MemberSelection } from '../members/member-selection';
 import { MemberPlace } from '../places/member-place';
@@ -6,6 +7,8 @@ import { PlaceExplanation } from '../places/place-explanation';
 import { placeShowsWhole } from '../places/place-shows-whole';
 import { FindingList } from '../../ui/page/finding-list';
 import { MemberCarving } from './member-carving';
+import { MemberOrnaments } from './member-ornaments';
+import { OrnamentColumns } from './ornament-columns';
 import { WholeCarving } from './whole-carving';
 
 /** Carve: the ornaments of the selected member with their hours, or the carving of the whole job. */
@@ -13,7 +16,7 @@ import { WholeCarving } from './whole-carving';
   selector: 'app-carve-page',
   imports: [FindingList, MemberCarving, MemberPlace, WholeCarving],
   changeDetection: ChangeDetectionStrategy.OnPush,
-  providers: [PlaceExplanation],
+  providers: [MemberOrnaments, PlaceExplanation],
   template: `
     <app-member-place>
       @if (selection.shown(); as member) {
@@ -21,7 +24,7 @@ import { WholeCarving } from './whole-carving';
       } @else {
         <app-whole-carving />
       }
-      <app-finding-list beside linked [findings]="findings()" />
+      <app-finding-list beside linked [findings]="findings()" (chosen)="go($event)" />
     </app-member-place>
   `,
   styles: `
@@ -34,14 +37,14 @@ import { WholeCarving } from './whole-carving';
 })
 export class CarvePage {
   private readonly store = inject(EstimateStore);
+  private readonly ornaments = inject(MemberOrnaments);
+  private readonly ornamentColumns = inject(OrnamentColumns);
   protected readonly selection = inject(MemberSelection);
 
   /** What is to be told of the ornaments shown, and of the dust of carving at all. */
   protected readonly findings = computed(() => {
-    const member = this.selection.shown();
-    const own =
-      member?.ornaments.map(({ id }) => id) ??
-      this.store.members().flatMap(({ ornaments }) => ornaments.map(({ id }) => id));
+    const members = [this.selection.shown() ?? this.store.members()].flat();
+    const own = members.flatMap(({ ornaments }) => ornaments.map(({ id }) => id));
     return (this.store.figures()?.findings ?? []).filter(
       ({ code, about }) => code.startsWith('carving-') && (about === undefined || own.includes(about)),
     );
@@ -49,5 +52,17 @@ export class CarvePage {
 
   constructor() {
     placeShowsWhole();
+    inject(PlaceExplanation).follow(() => {
+      const row = this.selection.shown() && this.ornaments.chosen();
+      return row && this.ornamentColumns.explained(row);
+    });
+  }
+
+  /** To the ornament a finding speaks of. */
+  protected go({ about }: Finding): void {
+    const member = this.store.members().find(({ ornaments }) => ornaments.some(({ id }) => id === about));
+    if (!member) return;
+    this.ornaments.choose(about);
+    if (member.id !== this.selection.shown()?.id) this.selection.select(member.id);
   }
 }

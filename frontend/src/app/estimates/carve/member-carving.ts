@@ -9,7 +9,7 @@ import { EntryAt, type EntryChoice } from '../../ui/field/entry-at';
 import { FigureTable } from '../../ui/table/figure-table';
 import { EstimateStore } from '../estimate-store';
 import { alternativeChoices } from '../places/alternative-choices';
-import { PlaceExplanation } from '../places/place-explanation';
+import { memberAbout } from '../places/member-about';
 import { MemberOrnaments } from './member-ornaments';
 import { OrnamentColumns } from './ornament-columns';
 import type { OrnamentRow } from './ornament-row';
@@ -21,7 +21,6 @@ type Run = Extract<OrnamentExtent, { way: 'run' }>;
   selector: 'app-member-carving',
   imports: [EntryAt, FigureTable, HoursTable, MatButton, OrnamentForm, OrnamentPicker, RunDrawing],
   changeDetection: ChangeDetectionStrategy.OnPush,
-  providers: [MemberOrnaments],
   templateUrl: './member-carving.html',
   styleUrl: '../places/member-content.scss',
 })
@@ -37,11 +36,7 @@ export class MemberCarving {
   private readonly figures = computed(() =>
     this.store.figures()?.members.find(({ memberId }) => memberId === this.member().id),
   );
-  protected readonly about = computed(() => {
-    const { count } = this.member();
-    const alike = count > 1 ? $localize`${this.formats.number(count, 0)}:count: alike` : '';
-    return [this.figures()?.timber, alike].filter(Boolean).join(', ');
-  });
+  protected readonly about = computed(() => memberAbout(this.member(), this.figures(), this.formats));
   protected readonly columns = computed(() =>
     this.ornamentColumns.of(this.store, this.isSmall(), (row, key) => this.ornaments.remark(row, key)),
   );
@@ -69,13 +64,6 @@ export class MemberCarving {
   /** As a list of one, so that another ornament is another form. */
   protected readonly chosen = computed(() => this.ornaments.rows().filter((row) => row === this.ornaments.chosen()));
   protected readonly rowId = ({ use }: OrnamentRow): string => use.id;
-
-  constructor() {
-    inject(PlaceExplanation).follow(() => {
-      const row = this.ornaments.chosen();
-      return row && this.ornamentColumns.explained(row);
-    });
-  }
 
   protected runOf({
     use,

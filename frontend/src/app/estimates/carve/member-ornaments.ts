@@ -29,8 +29,9 @@ export class MemberOrnaments {
   readonly rows = computed<readonly OrnamentRow[]>(() =>
     (this.form.value<readonly MemberOrnament[]>('ornaments') ?? []).map((use, index) => {
       const worked = this.store.figures()?.uses.find(({ useId }) => useId === use.id);
-      const known = this.catalogue().find(({ id }) => id === use.ornamentId)?.name;
-      return { use, path: `ornaments.${index}`, name: known ?? worked?.ornament ?? use.ornamentId, worked };
+      const entry = this.catalogue().find(({ id }) => id === use.ornamentId);
+      const name = entry?.name ?? worked?.ornament ?? use.ornamentId;
+      return { use, path: `ornaments.${index}`, name, hasRelief: entry?.relief !== null, worked };
     }),
   );
   /** The one that is open below the table: the one chosen, else the first. */

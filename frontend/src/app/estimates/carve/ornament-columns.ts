@@ -2,10 +2,12 @@ import { Injectable, inject } from '@angular/core';
 import type { Triple } from '#shared/units/triple';
 import { planNames, RunWords } from '../../carving';
 import { Formats } from '../../core/formats/formats';
+import { Words } from '../../core/formats/words';
 import { reliefNames } from '../../measure';
 import type { Explained } from '../../ui/figure/explained';
 import type { FigureColumn } from '../../ui/table/figure-column';
 import { EstimateStore } from '../estimate-store';
+import { explainedBy } from '../places/explained-by';
 import type { OrnamentRow } from './ornament-row';
 
 type Column = FigureColumn<OrnamentRow>;
@@ -13,7 +15,8 @@ type Column = FigureColumn<OrnamentRow>;
 /** The columns of the ornaments of a member. */
 @Injectable({ providedIn: 'root' })
 export class OrnamentColumns {
-  private readonly formats = inject(Formats);
+  readonly formats = inject(Formats);
+  readonly words = inject(Words);
   private readonly runWords = inject(RunWords);
 
   /** `remark` says what is wrong with a cell, by its row and key. */
@@ -32,7 +35,6 @@ export class OrnamentColumns {
       heading: $localize`Amount`,
       kind: 'figure',
       text: ({ use }) => this.runWords.ofExtent(use.extent),
-      minor: ({ use }) => this.runWords.ofRest(use.extent),
     };
     return [
       name,
@@ -51,11 +53,8 @@ export class OrnamentColumns {
 
   explained({ use, worked }: OrnamentRow): Explained | undefined {
     if (!worked) return undefined;
-    return {
-      id: `use ${use.id}`,
-      heading: this.formats.figure('hours', worked.carving.likely),
-      reasons: worked.reasons,
-    };
+    const heading = this.formats.figure('hours', worked.carving.likely);
+    return explainedBy({ id: `use ${use.id}`, heading, reasons: worked.reasons }, this);
   }
 
   private repeats(): Column {
@@ -91,18 +90,19 @@ export class OrnamentColumns {
 
   private range(): Column {
     const text = ({ worked }: OrnamentRow) => (worked ? this.between(worked.carving) : '');
-    return { key: 'range', heading: $localize`Low to high`, kind: 'text', text };
+    return { key: 'range', heading: $localize`Low to high`, kind: 'figure', text };
   }
 
   /** What makes it dearer or cheaper: “high, undercut, flat sweep”. */
-  private particulars({ use }: OrnamentRow, store: EstimateStore): string {
+  private particulars({ use, hasRelief }: OrnamentRow, store: EstimateStore): string {
     const alternative = store.settings()?.alternatives.find(({ id }) => id === use.alternativeId)?.name ?? '';
     return [
-      reliefNames[use.relief].toLowerCase(),
+      hasRelief ? reliefNames[use.relief].toLowerCase() : '',
       use.isUndercut ? $localize`undercut` : '',
       use.plan === 'straight' ? '' : planNames[use.plan].toLowerCase(),
       use.isMirrored ? $localize`other hand` : '',
       use.hasOwnPattern ? $localize`own pattern` : '',
+      this.runWords.ofRest(use.extent),
       alternative && $localize`in “${alternative}:alternative:”`,
     ]
       .filter(Boolean)

@@ -6,6 +6,8 @@ export interface OrnamentRow {
   readonly use: MemberOrnament;
   readonly path: string;
   readonly name: string;
+  /** Work done once, shaping and free carving have none. */
+  readonly hasRelief: boolean;
   /** Undefined where it belongs to an alternative that is not chosen. */
   readonly worked: UseFigures | undefined;
 }

@@ -1,7 +1,4 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
-import type { UseFigures } from '#shared/estimates/figures';
-import type { Triple } from '#shared/units/triple';
-import { tripleSum } from '#shared/units/triple-sum';
 import { gradeHours, HoursTable, stageHours } from '../../carving';
 import { Formats } from '../../core/formats/formats';
 import type { Explained } from '../../ui/figure/explained';
@@ -10,27 +7,10 @@ import { EmptyState } from '../../ui/page/empty-state';
 import type { FigureColumn } from '../../ui/table/figure-column';
 import { FigureTable } from '../../ui/table/figure-table';
 import { EstimateStore } from '../estimate-store';
+import { explainedBy } from '../places/explained-by';
 import { PlaceExplanation } from '../places/place-explanation';
 import { OrnamentColumns } from './ornament-columns';
-
-/** One ornament over the whole job. */
-interface OrnamentSum {
-  readonly name: string;
-  readonly quantity: number;
-  readonly hours: Triple;
-}
-
-function sumsOf(uses: readonly UseFigures[]): OrnamentSum[] {
-  const names = [...new Set(uses.map(({ ornament }) => ornament))];
-  return names.map((name) => {
-    const own = uses.filter(({ ornament }) => ornament === name);
-    return {
-      name,
-      quantity: own.reduce((sum, { quantity }) => sum + quantity, 0),
-      hours: tripleSum(own.map(({ carving }) => carving)),
-    };
-  });
-}
+import { type OrnamentSum, ornamentSums } from './ornament-sums';
 
 /** The carving of the whole job: by ornament, by stage and by grade. */
 @Component({
@@ -42,18 +22,12 @@ function sumsOf(uses: readonly UseFigures[]): OrnamentSum[] {
       <header>
         <h2 i18n>Carving of the whole job</h2>
         <p>
-          <app-figure class="sum" [text]="total().heading" [explained]="total()" />
+          <app-figure class="sum" [text]="total().heading" [explained]="total()" />&ngsp;
           <span class="muted">{{ range() }}</span>
         </p>
       </header>
-      <app-figure-table
-        captionShown
-        i18n-caption
-        caption="By ornament"
-        [columns]="columns"
-        [rows]="sums()"
-        [rowId]="nameOf"
-      />
+      <h3 i18n>By ornament</h3>
+      <app-figure-table i18n-caption caption="By ornament" [columns]="columns" [rows]="sums()" [rowId]="nameOf" />
       <div class="tables">
         <app-hours-table i18n-caption caption="By stage" [rows]="byStage()" />
         <app-hours-table i18n-caption caption="By grade" [rows]="byGrade()" [showsGrade]="false" />
@@ -79,16 +53,16 @@ export class WholeCarving {
   private readonly grades = computed(
     () => this.store.figures()?.grades.map(({ gradeId: id, name }) => ({ id, name })) ?? [],
   );
-  protected readonly sums = computed(() => sumsOf(this.store.figures()?.uses ?? []));
+  protected readonly sums = computed(() => ornamentSums(this.store.figures()?.uses ?? [], this.store.members()));
   protected readonly byStage = computed(() =>
     stageHours(this.carving()?.rows ?? [], this.carving()?.stages ?? [], this.grades()),
   );
   protected readonly byGrade = computed(() => gradeHours(this.carving()?.rows ?? [], this.grades()));
-  protected readonly total = computed<Explained>(() => ({
-    id: 'carving',
-    heading: this.formats.figure('hours', this.carving()?.total.likely ?? 0),
-    reasons: this.carving()?.reasons ?? [],
-  }));
+  protected readonly total = computed<Explained>(() => {
+    const { total, reasons = [] } = this.carving() ?? {};
+    const heading = this.formats.figure('hours', total?.likely ?? 0);
+    return explainedBy({ id: 'carving', heading, reasons }, this.ornamentColumns);
+  });
   protected readonly range = computed(() => {
     const total = this.carving()?.total;
     return total ? this.ornamentColumns.between(total) : '';
@@ -98,9 +72,9 @@ export class WholeCarving {
     { key: 'name', heading: $localize`Ornament`, kind: 'text', text: ({ name }) => name },
     {
       key: 'quantity',
-      heading: $localize`How many`,
+      heading: $localize`How much`,
       kind: 'figure',
-      text: ({ quantity }) => this.formats.number(quantity, 1),
+      text: (sum) => this.amount(sum),
     },
     {
       key: 'hours',
@@ -111,10 +85,20 @@ export class WholeCarving {
     {
       key: 'range',
       heading: $localize`Low to high`,
-      kind: 'text',
+      kind: 'figure',
       text: ({ hours }) => this.ornamentColumns.between(hours),
     },
   ];
+
+  private amount({ pieces, run_mm, area_mm2 }: OrnamentSum): string {
+    return [
+      pieces > 0 ? this.formats.number(pieces, 0) : '',
+      run_mm > 0 ? this.formats.length(run_mm) : '',
+      area_mm2 > 0 ? this.formats.area(area_mm2) : '',
+    ]
+      .filter(Boolean)
+      .join(' + ');
+  }
 
   constructor() {
     inject(PlaceExplanation).follow(() => (this.byStage().length > 0 ? this.total() : undefined));

@@ -73,7 +73,10 @@ export class AirForm {
   protected readonly paces = computed(() =>
     this.factors().flatMap(({ model, factor, reasons, isClipped }) => {
       if (factor === null) return [];
-      const heading = $localize`${this.formats.number(factor, 2)}:factor: times as long`;
+      const heading =
+        Math.abs(factor - 1) < 0.005
+          ? $localize`as long as the card says`
+          : $localize`${this.formats.number(factor, 2)}:factor: times as long as the card says`;
       const explained: Explained = { id: `pace ${model}`, heading, reasons };
       return [{ model, name: dryingNames[model], explained, isClipped }];
     }),

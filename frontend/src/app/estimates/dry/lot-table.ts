@@ -4,6 +4,7 @@ import { Formats } from '../../core/formats/formats';
 import type { WorkedLot } from '../../drying';
 import type { FigureColumn } from '../../ui/table/figure-column';
 import { FigureTable } from '../../ui/table/figure-table';
+import { smallScreen } from '../price/small-screen';
 
 /** The lots with their hands-on and waiting time, and on which days they are in work. */
 @Component({
@@ -16,7 +17,7 @@ import { FigureTable } from '../../ui/table/figure-table';
       i18n-caption
       caption="Lots"
       selectable
-      [columns]="columns"
+      [columns]="columns()"
       [rows]="lots()"
       [rowId]="idOf"
       [totals]="totals()"
@@ -26,31 +27,57 @@ import { FigureTable } from '../../ui/table/figure-table';
 })
 export class LotTable {
   private readonly formats = inject(Formats);
+  private readonly isSmall = smallScreen();
 
   readonly lots = input.required<readonly WorkedLot[]>();
   readonly chosen = model<string>();
 
   protected readonly idOf = ({ lotId }: WorkedLot): string => lotId;
-  protected readonly columns: readonly FigureColumn<WorkedLot>[] = [
-    { key: 'name', heading: $localize`Coated together`, kind: 'text', text: ({ name }) => name },
-    {
-      key: 'handsOn',
-      heading: $localize`Hands on`,
-      kind: 'figure',
-      text: ({ handsOn_minutes }) => this.hours(handsOn_minutes),
-    },
-    {
-      key: 'waiting',
-      heading: $localize`Waiting`,
-      kind: 'figure',
-      text: ({ waiting_minutes }) => this.formats.figure('minutes', waiting_minutes),
-    },
-    { key: 'days', heading: $localize`In work`, kind: 'text', text: (lot) => this.days(lot) },
-  ];
+  protected readonly columns = computed<readonly FigureColumn<WorkedLot>[]>(() => {
+    const name: FigureColumn<WorkedLot> = {
+      key: 'name',
+      heading: $localize`Coated together`,
+      kind: 'text',
+      text: (lot) => lot.name,
+      minor: (lot) => (this.isSmall() ? this.small(lot) : ''),
+    };
+    return [name, ...(this.isSmall() ? [] : this.times()), this.inWork()];
+  });
   protected readonly totals = computed(() => {
     const minutes = this.lots().reduce((sum, { handsOn_minutes }) => sum + handsOn_minutes, 0);
     return { name: $localize`Together`, handsOn: this.hours(minutes) };
   });
+
+  private times(): FigureColumn<WorkedLot>[] {
+    return [
+      {
+        key: 'handsOn',
+        heading: $localize`Hands on`,
+        kind: 'figure',
+        text: ({ handsOn_minutes }) => this.hours(handsOn_minutes),
+      },
+      {
+        key: 'waiting',
+        heading: $localize`Waiting`,
+        kind: 'figure',
+        text: ({ waiting_minutes }) => this.waiting(waiting_minutes),
+      },
+    ];
+  }
+
+  private inWork(): FigureColumn<WorkedLot> {
+    return { key: 'days', heading: $localize`In work`, kind: 'text', text: (lot) => this.days(lot) };
+  }
+
+  /** What the columns of a phone leave out. */
+  private small({ handsOn_minutes, waiting_minutes }: WorkedLot): string {
+    const [handsOn, waiting] = [this.hours(handsOn_minutes), this.waiting(waiting_minutes)];
+    return $localize`${handsOn}:hours: hands on, ${waiting}:time: waiting`;
+  }
+
+  private waiting(minutes: number): string {
+    return this.formats.figure('minutes', minutes);
+  }
 
   private hours(minutes: number): string {
     return $localize`${this.formats.number(minutes / 60, 1, 1)}:hours: h`;

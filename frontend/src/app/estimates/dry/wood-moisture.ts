@@ -13,7 +13,7 @@ import { EstimateStore } from '../estimate-store';
   template: `
     @for (rest of rests(); track rest.name) {
       <p>
-        <span class="muted">{{ rest.name }}</span>
+        <span class="muted">{{ rest.name }}</span>&ngsp;
         <app-figure [text]="rest.explained.heading" [explained]="rest.explained" />
       </p>
     }

@@ -8,6 +8,7 @@ import { type CarvedRow, LayPlanDrawing, type LaidZone } from '../../leaf';
 import { Icon } from '../../ui/icon/icon';
 import { FigureTable } from '../../ui/table/figure-table';
 import { EstimateStore } from '../estimate-store';
+import { memberAbout } from '../places/member-about';
 import { smallScreen } from '../price/small-screen';
 import { MemberZones } from './member-zones';
 import { ZoneColumns } from './zone-columns';
@@ -36,19 +37,7 @@ export class MemberGilding {
 
   readonly member = input.required<Member>();
 
-  /** “Lime, girth 59.1 mm, run 2860 mm, 2 alike”. */
-  protected readonly about = computed(() => {
-    const figures = this.zones.figures();
-    const { count } = this.member();
-    return [
-      figures?.timber,
-      figures?.girth_mm ? $localize`girth ${this.formats.length(figures.girth_mm)}:girth:` : '',
-      figures?.run_mm ? $localize`run ${this.formats.length(figures.run_mm)}:run:` : '',
-      count > 1 ? $localize`${this.formats.number(count, 0)}:count: alike` : '',
-    ]
-      .filter(Boolean)
-      .join(', ');
-  });
+  protected readonly about = computed(() => memberAbout(this.member(), this.zones.figures(), this.formats));
   protected readonly columns = computed(() =>
     this.zoneColumns.of(this.store, this.isSmall(), ({ path }) => this.zones.form.message(`${path}.name`)),
   );

@@ -32,10 +32,11 @@ interface ZoneOfJob {
         <h2 i18n>Gilding of the whole job</h2>
       </header>
       @if (products().length > 0) {
+        <h3 i18n>Leaf</h3>
         <app-leaf-totals [products]="products()" />
       }
+      <h3 i18n>Every zone</h3>
       <app-figure-table
-        captionShown
         i18n-caption
         caption="Every zone"
         selectable

@@ -1,9 +1,11 @@
 import { Injectable, inject } from '@angular/core';
 import { laidAs } from '../../leaf';
 import { Formats } from '../../core/formats/formats';
+import { Words } from '../../core/formats/words';
 import type { Explained } from '../../ui/figure/explained';
 import type { FigureColumn } from '../../ui/table/figure-column';
 import { EstimateStore } from '../estimate-store';
+import { explainedBy } from '../places/explained-by';
 import type { ZoneRow } from './zone-row';
 
 type Column = FigureColumn<ZoneRow>;
@@ -11,7 +13,8 @@ type Column = FigureColumn<ZoneRow>;
 /** The columns of the zones of a member. */
 @Injectable({ providedIn: 'root' })
 export class ZoneColumns {
-  private readonly formats = inject(Formats);
+  readonly formats = inject(Formats);
+  readonly words = inject(Words);
 
   /** `remark` says what is wrong with a name. */
   of(store: EstimateStore, isSmall: boolean, remark: (row: ZoneRow) => string): readonly Column[] {
@@ -31,8 +34,9 @@ export class ZoneColumns {
   /** How the leaves of a zone came about, to stand beside the table. */
   explained({ zone, worked }: ZoneRow): Explained | undefined {
     if (!worked?.leaf) return undefined;
-    const leaves = worked.leaf.grossLeaves.likely;
-    return { id: `leaf ${zone.id}`, heading: this.formats.figure('leaves', leaves), reasons: worked.leaf.reasons };
+    const leaves = this.formats.number(worked.leaf.grossLeaves.likely, 1, 1);
+    const heading = $localize`${leaves}:leaves: leaves`;
+    return explainedBy({ id: `leaf ${zone.id}`, heading, reasons: worked.leaf.reasons }, this);
   }
 
   /** The bottom line of a member. */
@@ -76,7 +80,8 @@ export class ZoneColumns {
       kind: 'figure',
       text: ({ worked }) => (worked ? this.areaText(worked.true_mm2) : '–'),
       explained: ({ zone, worked }) =>
-        worked && { id: `zone ${zone.id}`, heading: this.areaText(worked.true_mm2), reasons: worked.reasons },
+        worked &&
+        explainedBy({ id: `zone ${zone.id}`, heading: this.areaText(worked.true_mm2), reasons: worked.reasons }, this),
     };
   }
 
