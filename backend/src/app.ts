@@ -1,6 +1,7 @@
 import { openAccounts, type Accounts } from './accounts';
 import { openAudit, type Audit } from './audit';
-import { openEstimates, type Estimates, type PaperMaker } from './estimates';
+import { benchSheet, issuePapers } from './documents';
+import { openEstimates, type Estimates } from './estimates';
 import { openJobs, type Jobs } from './jobs';
 import { isPage } from './page-places';
 import { openWebServer, type WebServer } from './platform/http/web-server';
@@ -19,12 +20,6 @@ export interface App {
   readonly sweep: () => Promise<void>;
 }
 
-/** Who makes the papers of issues. */
-const papers: PaperMaker = {
-  issuePapers: () => Promise.resolve([]),
-  benchSheet: () => Promise.resolve(Buffer.alloc(0)),
-};
-
 /** Joins the features: each is given what stands before it in the list, and brings its routes. */
 export function openApp(platform: Platform, catcher?: MailCatcher): App {
   const audit = openAudit(platform);
@@ -40,7 +35,13 @@ export function openApp(platform: Platform, catcher?: MailCatcher): App {
       dropDrafts: (workshopId, jobId) => estimates.drafts.drop(workshopId, jobId),
     },
   });
-  const estimates: Estimates = openEstimates(platform, { accounts, audit, rateCards, jobs, papers });
+  const estimates: Estimates = openEstimates(platform, {
+    accounts,
+    audit,
+    rateCards,
+    jobs,
+    papers: { issuePapers, benchSheet },
+  });
   const routes = [...audit.routes, ...accounts.routes, ...rateCards.routes, ...jobs.routes, ...estimates.routes];
   const web = openWebServer(platform, { routes, identities: accounts.identities, isPage, catcher });
   const sweep = async () => void (await Promise.all([web.sweep(), accounts.sweep(), platform.files.sweep()]));

@@ -1,12 +1,20 @@
 import { randomUUID } from 'node:crypto';
+import type { Response } from 'supertest';
 import { v7 as newId } from 'uuid';
 import { changeEstimate, readEstimate } from '#shared/estimates/estimates-endpoints';
-import { issueEstimate, listIssues, markIssue, readIssue } from '#shared/estimates/issues-endpoints';
+import { issueEstimate, listIssues, markIssue, readIssue, readPaper } from '#shared/estimates/issues-endpoints';
 import type { Change } from '#shared/estimates/change-schema';
 import { listHistory } from '#shared/audit/history-endpoints';
 import { removeJob } from '#shared/jobs/jobs-endpoints';
 import { startApi, type Api } from './start-api';
 import { sampleEstimate, sampleMember, type SampleEstimate } from './sample-estimate';
+
+/** A body as it came, whatever its media type. */
+const binary = (response: Response, done: (error: Error | null, body: Buffer) => void): void => {
+  const parts: Buffer[] = [];
+  response.on('data', (part: Buffer) => parts.push(part));
+  response.on('end', () => done(null, Buffer.concat(parts)));
+};
 
 let api: Api;
 beforeAll(async () => {
@@ -268,6 +276,40 @@ describe('issuing', () => {
     }
     expect(reached).toBeGreaterThan(10);
   }, 120_000);
+});
+
+describe('the papers of an issue', () => {
+  const starts = {
+    'estimate.pdf': '%PDF-',
+    'estimate.xlsx': 'PK',
+    'leaf-order.pdf': '%PDF-',
+    'leaf-order.csv': '\ufeff',
+  };
+
+  async function paper(role: 'estimator' | 'office', issueId: string, name: string) {
+    return api
+      .as(role)
+      .call(readPaper, { params: { issueId, paper: name } })
+      .buffer(true)
+      .parse(binary);
+  }
+
+  it('are kept byte for byte, and sent as files that no page may run', async () => {
+    const { id } = (await issue(await sampleEstimate(api.ours))).body as { id: string };
+    for (const [name, start] of Object.entries(starts)) {
+      const response = await paper('estimator', id, name);
+      expect(response.status).toBe(200);
+      expect((response.body as Buffer).toString('utf8').startsWith(start)).toBe(true);
+      expect(response.headers['content-disposition']).toMatch(/^attachment/);
+      expect((await paper('estimator', id, name)).body).toEqual(response.body);
+    }
+  });
+
+  it('with rates and margin in them are not for the office', async () => {
+    const { id } = (await issue(await sampleEstimate(api.ours))).body as { id: string };
+    expect((await paper('office', id, 'estimate.xlsx')).status).toBe(403);
+    expect((await paper('office', id, 'estimate.pdf')).status).toBe(200);
+  });
 });
 
 describe('removing a job', () => {

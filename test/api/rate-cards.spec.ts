@@ -321,6 +321,17 @@ describe('The effects of a draft on open estimates', () => {
     expect(await effectsOf(draft.id)).toMatchObject({ state: 'done', isCurrent: true });
   });
 
+  it('stay those of the card while only its name or its day is another', async () => {
+    const draft = await draftCard(api.ours);
+    await workOut(draft.id);
+    const renamed = summary(await keep(draft, draft.content, 'Renamed'));
+    expect(await effectsOf(draft.id)).toMatchObject({ state: 'done', isCurrent: true });
+    const set = summary(await putFrom(renamed, 120));
+    expect(await effectsOf(draft.id)).toMatchObject({ state: 'done', isCurrent: true });
+    await owner.call(takeRateCardBack, at(set));
+    expect(await effectsOf(draft.id)).toMatchObject({ state: 'done', isCurrent: true });
+  });
+
   it('are worked out once while they are being worked out', async () => {
     const draft = await draftCard(api.ours);
     const ask = () => owner.call(workCardEffects, { params: { rateCardId: draft.id } });

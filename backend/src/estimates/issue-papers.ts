@@ -1,7 +1,7 @@
 import type { Paper } from '#shared/estimates/issue-schema';
 import type { Draft } from '#shared/estimates/draft';
 import type { WorkFigures } from '#shared/estimates/figures';
-import type { Snapshot, SnapshotWorkshop } from '#shared/estimates/snapshot';
+import type { Snapshot, SnapshotJob, SnapshotWorkshop } from '#shared/estimates/snapshot';
 
 /** A paper made of an issue. */
 export interface PaperFile {
@@ -14,11 +14,13 @@ export interface PaperFile {
 /** What the bench is handed of one piece: no price in it, nor in what it is made from. */
 export interface BenchSheetRequest {
   readonly workshop: SnapshotWorkshop;
-  readonly job: { readonly number: string; readonly title: string };
+  readonly job: SnapshotJob;
   readonly pieceId: string;
   readonly draft: Draft;
   readonly figures: WorkFigures;
-  readonly today: string;
+  /** Instant in UTC (ISO 8601), and its day in the workshop's zone. */
+  readonly madeAt: string;
+  readonly madeOn: string;
 }
 
 /** Who makes the papers: a later feature, supplied when the application is put together. */

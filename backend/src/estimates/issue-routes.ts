@@ -22,6 +22,6 @@ export const issueRoutes = (issues: IssueService): Route[] => [
   mount(readDifferences, ({ actor, params }) => issues.differences(actor.workshopId, params.estimateId)),
   mount(readIssue, ({ actor, params }) => issues.read(actor, params.issueId)),
   mount(markIssue, async ({ actor, params, body }) => presentIssue(await issues.mark(actor, params.issueId, body))),
-  mount(readPaper, ({ actor, params }) => issues.paper(actor.workshopId, params.issueId, params.paper)),
+  mount(readPaper, ({ actor, params }) => issues.paper(actor, params.issueId, params.paper)),
   mount(readBenchSheet, ({ actor, params }) => issues.benchSheet(actor.workshopId, params.estimateId, params.pieceId)),
 ];

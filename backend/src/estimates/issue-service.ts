@@ -126,7 +126,7 @@ export class IssueService {
     return {
       summary: presentIssue(row),
       differences: before ? lineDifferences(namedLines(thawedSnapshot(before)), namedLines(snapshot)) : [],
-      alternatives: snapshot.alternatives,
+      alternatives: [...snapshot.alternatives],
       estimate: presentEstimate(whole, snapshot.figures, audienceOf(actor.roles)) as CostedEstimate | PricedEstimate,
     };
   }
@@ -145,7 +145,11 @@ export class IssueService {
     return { letter: newest.letter, lines: lineDifferences(namedLines(thawedSnapshot(newest)), after) };
   }
 
-  async paper(workshopId: string, issueId: string, paper: Paper): Promise<FileAnswer> {
+  /** A paper as it was kept; the workbook holds rates and margin, so it is for those who see cost. */
+  async paper(actor: Actor, issueId: string, paper: Paper): Promise<FileAnswer> {
+    const { workshopId } = actor;
+    if (paper === 'estimate.xlsx' && audienceOf(actor.roles) !== 'cost')
+      throw new Rejection('not-allowed', 'problem-not-allowed');
     await this.parts.issues.get(workshopId, issueId);
     const fileId = await this.parts.issues.paperFile(workshopId, issueId, paper);
     if (!fileId) throw new Rejection('not-found', 'problem-not-found');
@@ -160,9 +164,9 @@ export class IssueService {
     const figures = await this.parts.drafts.figures(whole);
     const job = await this.job(workshopId, whole.estimate.jobId);
     const workshop = snapshotWorkshop(await this.parts.workshops.get(workshopId));
-    const today = await this.parts.cards.today(workshopId);
+    const made = { madeAt: this.parts.clock.now().toISOString(), madeOn: await this.parts.cards.today(workshopId) };
     const draft = this.parts.drafts.draft(whole);
-    const bytes = await this.parts.papers.benchSheet({ workshop, job, pieceId, draft, figures, today });
+    const bytes = await this.parts.papers.benchSheet({ workshop, job, pieceId, draft, figures, ...made });
     return new FileAnswer(bytes, { name: `${job.number} ${piece.content.name}.pdf`, media: 'application/pdf' });
   }
 

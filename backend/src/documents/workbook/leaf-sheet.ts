@@ -2,6 +2,7 @@ import type { ZoneLeaf } from '#shared/leaf/zone-leaf-result';
 import type { GoodsRates, LossRates } from './goods-rates';
 import { grossFormula } from './leaf-losses';
 import { leafProducts } from './leaf-products';
+import { settledFormula } from './rounded';
 import { formula, input, Sheet } from './sheet';
 import { lineNumber, type WorkbookFacts } from './workbook-facts';
 
@@ -80,9 +81,6 @@ function bookletSheet({ words }: WorkbookFacts, unit: string): Sheet {
   return sheet;
 }
 
-/** To ten digits, as every weight is taken: the last bits of a sum are not a reason for a cent. */
-const tenDigits = (sum: string): string => `IF(${sum}<=0,0,ROUND(${sum},9-INT(LOG10(${sum}))))`;
-
 /** Leaf zone by zone from its net leaves, then product by product as it is bought. */
 export function leafPages(facts: WorkbookFacts, rates: GoodsRates, unit: string): LeafPages {
   const { words } = facts;
@@ -99,6 +97,6 @@ export function leafPages(facts: WorkbookFacts, rates: GoodsRates, unit: string)
   const cost = leafProducts(sheet, rates.leaf, { facts, spans });
   const numberOf = (id: string) => rates.leaf.findIndex(({ product }) => product.id === id) + 1;
   const grossOnLine = (id: string, line: string) =>
-    tenDigits(`SUMIFS(${spans.gross},${spans.product},${numberOf(id)},${span(at.line)},${line})`);
+    settledFormula(`SUMIFS(${spans.gross},${spans.product},${numberOf(id)},${span(at.line)},${line})`);
   return { sheet, booklets, ...zones, cost, grossOnLine };
 }

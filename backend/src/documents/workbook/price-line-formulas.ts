@@ -1,7 +1,10 @@
 import type { LineWork } from '#shared/estimates/price/line-work';
 import type { NumberedLine } from './workbook-facts';
 import type { PricePage } from './price-parts';
-import { roundedAmount } from './rounded';
+import { roundedAmount, settledFormula } from './rounded';
+
+/** Hours as they enter money: to six decimals, floating point settled before. */
+const hoursTaken = (hours: string): string => `ROUND(${settledFormula(`(${hours})`)},6)`;
 
 /** Hours of one grade on a line, to six decimals, from carving, gilding, set-up and further lines; null where it has none. */
 export function hoursFormula(page: PricePage, { number, priced }: NumberedLine, gradeId: string): string | null {
@@ -9,7 +12,7 @@ export function hoursFormula(page: PricePage, { number, priced }: NumberedLine, 
   const { work } = priced;
   if (work.name !== null) {
     const isItsGrade = work.items.some(({ head, itemId }) => head === 'labour' && itemId === gradeId);
-    return isItsGrade ? `ROUND(${extras.hours(work.id)},6)` : null;
+    return isItsGrade ? hoursTaken(extras.hours(work.id) ?? '0') : null;
   }
   const grade = facts.grades.findIndex(({ id }) => id === gradeId) + 1;
   const at = { memberId: work.memberId ?? '', kind: work.kind, gradeId };
@@ -18,7 +21,7 @@ export function hoursFormula(page: PricePage, { number, priced }: NumberedLine, 
     ...(gilding.hasHours(number, grade) ? [gilding.hoursOnLine(number, grade)] : []),
     ...setUp.hoursOf(at),
   ];
-  return parts.length === 0 ? null : `ROUND(${parts.join('+')},6)`;
+  return parts.length === 0 ? null : hoursTaken(parts.join('+'));
 }
 
 /** The cells of a line, by the columns they stand in. */

@@ -14,3 +14,7 @@ export const minorOfAmount = (cell: string, digits: number): string =>
 
 /** Whole pieces that cover a figure: ceil(x − 1e-6), never below zero. */
 export const countedUp = (expression: string): string => `MAX(0,ROUNDUP(ROUND(${expression},8)-0.000001,0))`;
+
+/** To ten digits, as figures of floating point are taken before they count: the last bits of a sum are not a reason for a cent. */
+export const settledFormula = (expression: string): string =>
+  `ROUND(${expression},9-INT(LOG10(MAX(${expression},0.000001))))`;
