@@ -1,7 +1,7 @@
 import type { WhereOptions } from 'sequelize';
 import type { Database } from '../platform/database/database';
 import { outsideTransaction } from '../platform/database/transaction-context';
-import { WorkshopRows, type WorkshopRow } from '../platform/database/workshop-rows';
+import { WorkshopRows, type VersionedRow, type WorkshopRow } from '../platform/database/workshop-rows';
 import { cardEffectsTable, type CardEffectsRow } from './card-effects-model';
 
 type Change = Partial<Omit<CardEffectsRow, keyof WorkshopRow | 'runId'>>;
@@ -22,6 +22,12 @@ export class CardEffectsRepository extends WorkshopRows<CardEffectsRow> {
     const whole = { ...row, workshopId };
     await this.table.upsert(whole);
     return whole;
+  }
+
+  /** The card has another version, but its content is what the effects were worked out from. */
+  async follow(workshopId: string, before: VersionedRow, version: number): Promise<void> {
+    const where = { workshopId, id: before.id, cardVersion: before.version };
+    await this.table.update({ cardVersion: version }, { where });
   }
 
   /** Writes what one asking has come to, unless another came after it. */

@@ -3,12 +3,14 @@ import { Rejection } from '#shared/problems/rejection';
 import type { WordCode, WordValues } from '#shared/words/word-code';
 import type { Clock } from '../platform/clock/clock';
 import { refuseStale, type Seen } from '../platform/database/keeping';
+import type { CardEffectsRepository } from './card-effects-repository';
 import type { CardHistory } from './card-history';
-import type { RateCardHead } from './rate-card-model';
+import type { RateCardHead, RateCardRow } from './rate-card-model';
 import type { RateCardRepository } from './rate-card-repository';
 
 interface Parts {
   readonly cards: RateCardRepository;
+  readonly effects: Pick<CardEffectsRepository, 'follow'>;
   readonly history: CardHistory;
   readonly clock: Clock;
   /** The day it is in a workshop. */
@@ -33,10 +35,7 @@ export class CardInForceService {
     if (from < (await this.parts.today(actor.workshopId))) throw ofDay('invalid', 'rate-card-day-past');
     const other = await cards.headFrom(actor.workshopId, from);
     if (other) throw ofDay('conflict', 'rate-card-day-taken', { name: other.name });
-    const dated = await cards.changeHead(actor.workshopId, card, {
-      inForceFrom: from,
-      changedAt: this.parts.clock.now(),
-    });
+    const dated = await this.change(card, from);
     await history.record(actor, dated, { code: 'history-rate-card-in-force', values: { day: from } });
     return dated;
   }
@@ -49,11 +48,16 @@ export class CardInForceService {
     if (card.inForceFrom <= (await this.parts.today(actor.workshopId)))
       throw new Rejection('conflict', 'rate-card-begun');
     refuseStale(card, seen.version);
-    const draft = await cards.changeHead(actor.workshopId, card, {
-      inForceFrom: null,
-      changedAt: this.parts.clock.now(),
-    });
+    const draft = await this.change(card, null);
     await history.record(actor, draft, { code: 'history-rate-card-taken-back' });
     return draft;
+  }
+
+  /** Another day, the same content: what it does to open estimates stays known. */
+  private async change(card: RateCardRow, inForceFrom: string | null): Promise<RateCardRow> {
+    const { cards, effects, clock } = this.parts;
+    const changed = await cards.changeHead(card.workshopId, card, { inForceFrom, changedAt: clock.now() });
+    await effects.follow(card.workshopId, card, changed.version);
+    return changed;
   }
 }

@@ -4,12 +4,14 @@ import { Rejection } from '#shared/problems/rejection';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import type { Clock } from '../platform/clock/clock';
 import { refuseStale, type Seen } from '../platform/database/keeping';
+import type { CardEffectsRepository } from './card-effects-repository';
 import type { CardHistory } from './card-history';
 import type { RateCardHead, RateCardRow } from './rate-card-model';
 import type { RateCardRepository } from './rate-card-repository';
 
 interface Parts {
   readonly cards: RateCardRepository;
+  readonly effects: Pick<CardEffectsRepository, 'follow'>;
   readonly history: CardHistory;
   readonly clock: Clock;
 }
@@ -81,8 +83,12 @@ export class DraftCardService {
     await history.record(actor, card, { code: 'history-rate-card-removed' });
   }
 
-  private change({ workshopId }: Actor, before: RateCardRow, { name, content }: CardEntry): Promise<RateCardRow> {
-    return this.parts.cards.changeHead(workshopId, before, { name, content, changedAt: this.parts.clock.now() });
+  /** Where only the name is another, what the card does to open estimates stays known. */
+  private async change({ workshopId }: Actor, before: RateCardRow, { name, content }: CardEntry): Promise<RateCardRow> {
+    const { cards, effects, clock } = this.parts;
+    const after = await cards.changeHead(workshopId, before, { name, content, changedAt: clock.now() });
+    if (isDeepStrictEqual(before.content, content)) await effects.follow(workshopId, before, after.version);
+    return after;
   }
 
   private async baseOf({ workshopId, basedOnId, content }: RateCardRow): Promise<RateCard> {

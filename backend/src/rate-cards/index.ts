@@ -42,13 +42,17 @@ export function openRateCards(platform: Platform, { accounts, audit, effects: wo
   const cards = new RateCardRepository(database);
   const history = new CardHistory(audit.service);
   const service = new RateCardService({ cards, workshops: accounts.workshops, audit: audit.service, clock });
-  const drafts = new DraftCardService({ cards, history, clock });
-  const inForce = new CardInForceService({ cards, history, clock, today: (workshopId) => service.today(workshopId) });
-  const effects = new CardEffectsService({
-    ...{ cards, tasks, clock, workOut },
-    effects: new CardEffectsRepository(database),
+  const effects = new CardEffectsRepository(database);
+  const drafts = new DraftCardService({ cards, effects, history, clock });
+  const inForce = new CardInForceService({
+    ...{ cards, effects, history, clock },
+    today: (workshopId) => service.today(workshopId),
   });
+  const effectsService = new CardEffectsService({ cards, effects, tasks, clock, workOut });
   const workbooks = new CardWorkbookService({ cards, drafts, workshops: accounts.workshops });
-  const routes = [...rateCardRoutes({ cards: service, drafts, inForce, workbooks }), ...cardEffectsRoutes(effects)];
+  const routes = [
+    ...rateCardRoutes({ cards: service, drafts, inForce, workbooks }),
+    ...cardEffectsRoutes(effectsService),
+  ];
   return { service, drafts, inForce, workbooks, routes };
 }

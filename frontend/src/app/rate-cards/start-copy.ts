@@ -16,7 +16,7 @@ export class StartCopy {
   async of(cardId: string): Promise<void> {
     const id = newId();
     const day = this.formats.dayOf(this.now());
-    await this.calls.copy(cardId, { id, name: $localize`Draft of ${day}:day:` });
+    await this.calls.copy(cardId, { id, name: $localize`Rates of ${day}:day:` });
     await this.router.navigate(['/rates', id]);
   }
 }

@@ -6,6 +6,7 @@ import type { FigureColumn } from '../../ui/table/figure-column';
 import { FigureTable } from '../../ui/table/figure-table';
 import { TableColumns, type TableRow } from './table-columns';
 import { TableEntries } from './table-entries';
+import { tableWidth_px } from './table-width';
 
 interface GridTableRow extends TableRow {
   readonly name: string;
@@ -23,6 +24,7 @@ interface GridTableRow extends TableRow {
       [columns]="columns()"
       [rows]="rows()"
       [rowId]="idOf"
+      [style.max-width.px]="width_px()"
       (edited)="entries.edit(entered(), $event)"
       (pasted)="entries.paste(entered(), $event)"
     />
@@ -48,6 +50,7 @@ export class CardGrid {
     { key: 'row', heading: this.caption(), kind: 'text', text: ({ name }) => name },
     ...this.tableColumns.of(this.table().columns),
   ]);
+  protected readonly width_px = computed(() => tableWidth_px(this.columns().length));
   protected readonly entered = computed(() => ({ columns: this.table().columns, rows: this.rows() }));
 
   protected readonly idOf = ({ id }: GridTableRow): string => id;

@@ -21,6 +21,7 @@ import { CardStore } from '../card/card-store';
 import { columnSetsOf } from './column-sets';
 import { copiedRow, newRow } from './new-row';
 import { TableColumns, type TableRow } from './table-columns';
+import { tableWidth_px } from './table-width';
 import { TableEntries, type EnteredTable } from './table-entries';
 import { withRow, withRowMoved, withoutRow } from './with-rows';
 
@@ -74,11 +75,17 @@ export class CardList {
   protected readonly sets = computed(() =>
     columnSetsOf(this.columns() ?? this.table().columns).map(({ columns, heading }) => ({
       caption: heading ? `${this.caption()}: ${heading}` : this.caption(),
+      isNamed: heading !== '' || (this.within().length > 0 && !this.flat()),
+      width_px: tableWidth_px(columns.length),
       columns: this.tableColumns.of(columns),
       entered: { columns, rows: this.rows(), grow: (content, at) => this.grown(content, at) } satisfies EnteredTable,
     })),
   );
-  protected readonly chosenId = linkedSignal<string | undefined>(() => this.rows()[0]?.id);
+  /** The chosen row stays the chosen one while it is there. */
+  protected readonly chosenId = linkedSignal<readonly ListTableRow[], string | undefined>({
+    source: this.rows,
+    computation: (rows, before) => (rows.some(({ id }) => id === before?.value) ? before?.value : rows[0]?.id),
+  });
   readonly chosen = computed(() => this.rows().find(({ id }) => id === this.chosenId()));
   protected readonly complaints = computed(() => this.store.remarks().ofList(this.list()));
   /** The lists that stand in each row, for the chosen one. */

@@ -79,11 +79,13 @@ export class CellWriting {
   /** A value as the cell would show it. */
   valueText({ column, path }: Cell, value: unknown, content: RateCard): string {
     const choices = this.choices({ column, path }, content);
-    if (choices) return choices.find((choice) => choice.value === value)?.label ?? (typeof value === 'string' ? value : '');
+    if (choices)
+      return choices.find((choice) => choice.value === value)?.label ?? (typeof value === 'string' ? value : '');
     if (value === null || value === undefined) return '';
     if (column.kind === 'number') return this.numberText(column, value as number);
     if (column.kind === 'hundredths') return this.formats.typed((value as number) / 100);
-    if (column.kind === 'decimal') return formatDecimal(value as string, this.formats.locale());
+    if (column.kind === 'decimal')
+      return formatDecimal(this.decimalText(column, value as string), this.formats.locale());
     if (column.kind === 'choices') return this.severalText(column, value as readonly string[]);
     return value as string;
   }
@@ -109,6 +111,14 @@ export class CellWriting {
   private severalText(column: CardColumn, values: readonly string[]): string {
     const choices = this.worded(column);
     return values.map((value) => choices.find((choice) => choice.value === value)?.label ?? value).join(', ');
+  }
+
+  /** An amount of money has at least the places of the currency; a text that is no decimal stays as it is. */
+  private decimalText({ unit }: CardColumn, text: string): string {
+    if (unit !== 'money' || !/^\d+(\.\d+)?$/.test(text)) return text;
+    const [whole, places = ''] = text.split('.');
+    const padded = places.padEnd(this.formats.currencyDigits(), '0');
+    return padded === '' ? whole : `${whole}.${padded}`;
   }
 
   private numberText({ unit }: CardColumn, figure: number): string {

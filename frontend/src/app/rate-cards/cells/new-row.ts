@@ -161,7 +161,7 @@ export function copiedRow(row: object): object {
       ids.set(inner, newId());
       return [key, ids.get(inner)];
     });
-    return Object.fromEntries(entries) as unknown;
+    return Object.fromEntries(entries);
   };
   const linked = (value: unknown): unknown => {
     if (Array.isArray(value)) return value.map(linked);
@@ -169,7 +169,7 @@ export function copiedRow(row: object): object {
     const entries = Object.entries(value).map(([key, inner]: [string, unknown]): [string, unknown] =>
       key === 'toStepId' ? [key, ids.get(inner as string) ?? inner] : [key, linked(inner)],
     );
-    return Object.fromEntries(entries) as unknown;
+    return Object.fromEntries(entries);
   };
   return linked(renamed(row)) as object;
 }
