@@ -28,6 +28,10 @@ import { IssueClient } from './issue-client';
       display: block;
     }
 
+    li {
+      margin-left: -12px;
+    }
+
     a {
       max-width: 100%;
     }

@@ -9,11 +9,13 @@ import { Field } from '../../ui/field/field';
 import { FormComplaint } from '../../ui/field/form-complaint';
 import { FindingList } from '../../ui/page/finding-list';
 import { EstimateStore } from '../estimate-store';
+import { distinctFindings } from './distinct-findings';
 import { findingPlace } from './finding-place';
 import { IssueParts } from './issue-parts';
 import { Issuing } from './issuing';
 
 const stopping: readonly Finding['kind'][] = ['refuse', 'missing'];
+const told: readonly Finding['kind'][] = ['caution', 'note'];
 
 /** What stands in the way of the next issue, a note to it, and the button that makes it. */
 @Component({
@@ -39,7 +41,10 @@ export class IssueBox {
     ...(this.store.costed()?.cost.findings ?? []),
   ]);
   protected readonly stopping = computed(() => this.findings().filter(({ kind }) => stopping.includes(kind)));
-  protected readonly others = computed(() => this.findings().filter(({ kind }) => !stopping.includes(kind)));
+  protected readonly warnings = computed(() => distinctFindings(this.findings().filter(({ kind }) => kind === 'warn')));
+  protected readonly others = computed(() =>
+    distinctFindings(this.findings().filter(({ kind }) => told.includes(kind))),
+  );
   protected readonly gross = computed(() => this.formats.money(this.store.priced()?.price.gross_minor ?? 0));
 
   /** Goes where what a finding speaks of is entered. */

@@ -1,8 +1,11 @@
+import { NgTemplateOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, input, resource } from '@angular/core';
+import { sumMinor } from '#shared/money/sum-minor';
 import { Formats } from '../../core/formats/formats';
 import { EstimateStore } from '../estimate-store';
 import { PartList } from '../parts/part-list';
 import { PartPlace } from '../parts/part-place';
+import { narrowScreen } from '../parts/screen-width';
 import { PlaceExplanation } from '../places/place-explanation';
 import { AlternativeTotals } from '../price/alternative-totals';
 import { DifferenceTable } from '../price/difference-table';
@@ -24,6 +27,7 @@ import { Validity } from './validity';
     DifferenceTable,
     IssueBox,
     IssueTextsForm,
+    NgTemplateOutlet,
     PaperPreview,
     PartList,
     PartPlace,
@@ -40,6 +44,8 @@ export class IssuePage {
   protected readonly store = inject(EstimateStore);
   protected readonly parts = inject(IssueParts);
 
+  /** Without a column of its own, issuing stands before what it speaks of. */
+  protected readonly isNarrow = narrowScreen();
   /** The draft, where the address asks for it: on a phone it is shown instead of the list. */
   readonly part = input<string>();
 
@@ -56,6 +62,13 @@ export class IssuePage {
     this.differencesRead.hasValue() ? this.differencesRead.value() : undefined,
   );
   protected readonly before = computed(() => $localize`Issue ${this.differences()?.letter ?? ''}:letter:`);
+  protected readonly differenceText = computed(() => {
+    const changes = (this.differences()?.lines ?? []).map(
+      ({ before_minor, after_minor }) => (after_minor ?? 0) - (before_minor ?? 0),
+    );
+    const sum_minor = sumMinor(changes);
+    return `${sum_minor < 0 ? '−' : '+'} ${this.formats.money(Math.abs(sum_minor))}`;
+  });
   protected readonly net = computed(() => this.formats.money(this.store.priced()?.price.net_minor ?? 0));
   protected readonly gross = computed(() => this.formats.money(this.store.priced()?.price.gross_minor ?? 0));
   protected readonly draftKey = draftKey;

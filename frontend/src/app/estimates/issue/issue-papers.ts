@@ -31,6 +31,10 @@ const paperNames: Readonly<Record<Paper, string>> = {
     :host {
       display: block;
     }
+
+    li {
+      margin-left: -12px;
+    }
   `,
 })
 export class IssuePapers {

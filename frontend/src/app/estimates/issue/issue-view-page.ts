@@ -1,3 +1,4 @@
+import { NgTemplateOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, input, resource } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import type { CostedEstimate } from '#shared/estimates/estimate-schema';
@@ -8,6 +9,7 @@ import { Skeleton } from '../../ui/page/skeleton';
 import { EstimateStore } from '../estimate-store';
 import { PartList } from '../parts/part-list';
 import { PartPlace } from '../parts/part-place';
+import { narrowScreen } from '../parts/screen-width';
 import { PlaceExplanation } from '../places/place-explanation';
 import { MoneyBar } from '../price/money-bar';
 import { DifferenceTable } from '../price/difference-table';
@@ -36,6 +38,7 @@ import { Validity } from './validity';
     MarkForm,
     MatButton,
     MoneyBar,
+    NgTemplateOutlet,
     PartList,
     PartPlace,
     PriceLines,
@@ -52,6 +55,8 @@ export class IssueViewPage {
   protected readonly store = inject(EstimateStore);
   protected readonly parts = inject(IssueParts);
 
+  /** Without a column of its own, state and papers stand before the figures. */
+  protected readonly isNarrow = narrowScreen();
   readonly issueId = input.required<string>();
 
   protected readonly read = resource({

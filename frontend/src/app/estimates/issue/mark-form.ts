@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input, type OnInit, output } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, effect, inject, input, output, untracked } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { issueMarkSchema, type PricedIssueSummary } from '#shared/estimates/issue-schema';
@@ -44,7 +44,7 @@ const choices: Readonly<Record<'issued' | 'sent', readonly IssueMark['state'][]>
     </form>
   `,
 })
-export class MarkForm implements OnInit {
+export class MarkForm {
   private readonly client = inject(IssueClient);
   private readonly confirm = inject(Confirm);
   private readonly notices = inject(Notices);
@@ -57,8 +57,12 @@ export class MarkForm implements OnInit {
   protected readonly names = issueStateNames;
   protected readonly states = computed(() => choices[this.issue().state === 'sent' ? 'sent' : 'issued']);
 
-  ngOnInit(): void {
-    this.form.reset({ state: this.states()[0], day: this.validity.today(), note: '' });
+  constructor() {
+    // Once marked as sent, it is asked what came of it.
+    effect(() => {
+      const [state, day] = [this.states()[0], this.validity.today()];
+      untracked(() => this.form.reset({ state, day, note: '' }));
+    });
   }
 
   protected async send(): Promise<void> {

@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
-import { RouterLink } from '@angular/router';
+import { type Params, RouterLink } from '@angular/router';
 import type { Alternative } from '#shared/estimates/settings';
 import { settingsSchema } from '#shared/estimates/settings-schema';
 import { Entry } from '../../ui/field/entry';
@@ -10,6 +10,20 @@ import { EstimateStore } from '../estimate-store';
 import { liveForm } from '../settings/live-form';
 import { AlternativeActions } from './alternative-actions';
 import { itemsOfAlternative, replaceableItems, type ReplaceableItem } from './alternative-items';
+
+const places: Readonly<Record<ReplaceableItem['kind'], string>> = {
+  member: 'measure',
+  zone: 'gild',
+  ornament: 'carve',
+  extra: 'price',
+};
+
+const kindNames: Readonly<Record<ReplaceableItem['kind'], string>> = {
+  member: $localize`member`,
+  zone: $localize`zone`,
+  ornament: $localize`ornament`,
+  extra: $localize`further line`,
+};
 
 /** One alternative: its words, what of the base falls away for it, and what stands in it alone. */
 @Component({
@@ -35,6 +49,7 @@ export class AlternativeForm {
     },
     { id: '', name: '', group: '', note: '', replaces: [] },
   );
+  protected readonly kindNames = kindNames;
   protected readonly groups = computed(() => [
     ...new Set((this.store.settings()?.alternatives ?? []).map(({ group }) => group).filter(Boolean)),
   ]);
@@ -54,6 +69,15 @@ export class AlternativeForm {
     const ornaments = new Map((this.store.card()?.carving.ornaments ?? []).map(({ id, name }) => [id, name]));
     return (ornamentId: string) => ornaments.get(ornamentId) ?? ornamentId;
   });
+
+  /** Where it is entered. */
+  protected placeOf({ kind }: ReplaceableItem): string {
+    return `../${places[kind]}`;
+  }
+
+  protected queryOf({ memberId }: ReplaceableItem): Params {
+    return memberId === null ? { part: 'extras' } : { member: memberId };
+  }
 
   protected message(entry: string): string {
     const place = (this.store.settings()?.alternatives ?? []).findIndex(({ id }) => id === this.alternative().id);

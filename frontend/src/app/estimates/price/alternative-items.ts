@@ -1,6 +1,6 @@
 import type { Draft } from '#shared/estimates/draft';
 
-/** Something of the base that an alternative may take the place of. */
+/** Something of the base that an alternative may take the place of, or that stands in an alternative alone. */
 export interface ReplaceableItem {
   readonly id: string;
   readonly kind: 'member' | 'zone' | 'ornament' | 'extra';
@@ -33,21 +33,27 @@ export function replaceableItems({ members, settings }: Draft, ornamentName: Orn
   return [...ofMembers, ...extras];
 }
 
-/** What belongs to an alternative: the names of its members, of zones and ornaments in other members, of its lines. */
-export function itemsOfAlternative({ members, settings }: Draft, alternativeId: string, ornamentName: OrnamentName) {
+/** What belongs to an alternative: its members, zones and ornaments in other members, its lines. */
+export function itemsOfAlternative(
+  { members, settings }: Draft,
+  alternativeId: string,
+  ornamentName: OrnamentName,
+): ReplaceableItem[] {
   const own = (item: { readonly alternativeId: string | null }) => item.alternativeId === alternativeId;
-  const inMembers = members.flatMap((member) => {
-    if (own(member)) return [{ id: member.id, memberId: member.id, name: member.name }];
-    const zones = member.zones.filter(own).map(({ id, name }) => ({ id, name }));
+  const inMembers = members.flatMap((member): ReplaceableItem[] => {
+    if (own(member)) return [{ id: member.id, kind: 'member', memberId: member.id, name: member.name }];
+    const zones = member.zones.filter(own).map(({ id, name }) => ({ id, name, kind: 'zone' as const }));
     const ornaments = member.ornaments
       .filter(own)
-      .map(({ id, ornamentId }) => ({ id, name: ornamentName(ornamentId) }));
-    return [...zones, ...ornaments].map(({ id, name }) => ({
-      id,
+      .map(({ id, ornamentId }) => ({ id, name: ornamentName(ornamentId), kind: 'ornament' as const }));
+    return [...zones, ...ornaments].map((item) => ({
+      ...item,
       memberId: member.id,
-      name: `${member.name}, ${name}`,
+      name: `${member.name}, ${item.name}`,
     }));
   });
-  const extras = settings.extras.filter(own).map(({ id, name }) => ({ id, memberId: null, name }));
+  const extras = settings.extras
+    .filter(own)
+    .map(({ id, name }): ReplaceableItem => ({ id, kind: 'extra', memberId: null, name }));
   return [...inMembers, ...extras];
 }

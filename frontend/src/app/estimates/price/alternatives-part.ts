@@ -9,7 +9,7 @@ import { EstimateStore } from '../estimate-store';
 import { AlternativeActions } from './alternative-actions';
 import { AlternativeForm } from './alternative-form';
 import { AlternativeTotals } from './alternative-totals';
-import { smallScreen } from './small-screen';
+import { smallScreen } from '../parts/screen-width';
 
 /** Other ways of doing part of the work, each with its own total and what it is more or less than the base. */
 @Component({
@@ -45,9 +45,10 @@ export class AlternativesPart {
   protected readonly alternatives = computed(() => this.store.settings()?.alternatives ?? []);
   /** The chosen one, as a list of one, so that another one is another form. */
   protected readonly chosenOnes = computed(() => this.alternatives().filter(({ id }) => id === this.chosen()));
+  private readonly hasGroups = computed(() => this.alternatives().some(({ group }) => group !== ''));
   protected readonly columns = computed<readonly FigureColumn<Alternative>[]>(() => [
     { key: 'name', heading: $localize`Alternative`, kind: 'text', text: ({ name }) => name, minor: ({ note }) => note },
-    ...(this.isSmall() ? [] : [this.groupColumn()]),
+    ...(this.isSmall() || !this.hasGroups() ? [] : [this.groupColumn()]),
     ...(this.store.mayEdit() ? this.moneyColumns() : []),
   ]);
   protected readonly rowId = ({ id }: Alternative): string => id;

@@ -9,6 +9,9 @@ import { EstimateStore } from '../estimate-store';
 import { CardsInUse, type CardChange } from './cards-in-use';
 import { DifferenceTable } from './difference-table';
 
+/** The card a workshop starts with is in force from the first day there is. */
+const beginning = '1970-01-01';
+
 /** The rate card the estimate is worked on; where a newer one is in force, what it would change, and taking it. */
 @Component({
   selector: 'app-card-part',
@@ -33,7 +36,7 @@ export class CardPart {
   protected readonly isBusy = signal(false);
   protected readonly since = computed(() => {
     const from = this.cards.used()?.from;
-    return from ? this.formats.day(from) : '';
+    return from && from > beginning ? this.formats.day(from) : '';
   });
   protected readonly newerSince = computed(() => {
     const from = this.cards.newer()?.from;

@@ -47,7 +47,7 @@ export class MoneyBar {
   }
 
   private itemOf({ name, hours }: PriceHead): string {
-    return hours > 0 ? $localize`${name}:grade: ${this.formats.number(hours, 0)}:hours: h` : name;
+    return hours > 0 ? $localize`${name}:grade: ${this.formats.number(hours, hours < 10 ? 1 : 0)}:hours: h` : name;
   }
 
   private shareOf(amount_minor: number): string {

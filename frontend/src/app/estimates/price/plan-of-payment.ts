@@ -3,7 +3,7 @@ import type { EstimateSettings } from '#shared/estimates/settings';
 import type { StagePayments } from '#shared/money/stage-payments';
 import { Formats } from '../../core/formats/formats';
 import type { FigureColumn } from '../../ui/table/figure-column';
-import { smallScreen } from './small-screen';
+import { smallScreen } from '../parts/screen-width';
 import type { StageEntry } from './stage-entries';
 import { paymentPlan, stageColumns, type StageRow } from './stage-rows';
 
@@ -22,15 +22,17 @@ export class PlanOfPayment {
     payments: StagePayments | undefined,
     terms: Pick<EstimateSettings['stages'], 'deposit_percent' | 'retention_percent'>,
   ): StageRow[] {
-    const shares = [terms.deposit_percent, terms.retention_percent / 2];
-    const [taken, held] = shares.map((share) => this.formats.figure('percent', share));
+    const { deposit_percent, retention_percent } = terms;
+    const [taken, held] = [deposit_percent, retention_percent / 2].map((share) =>
+      this.formats.figure('percent', share),
+    );
     return paymentPlan(entries, payments, {
-      deposit: $localize`Deposit, ${taken}:percent:`,
+      deposit: deposit_percent > 0 ? $localize`Deposit, ${taken}:percent:` : undefined,
       whole: $localize`All of the work`,
-      releases: [
-        $localize`Retention, first half, ${held}:percent:`,
-        $localize`Retention, second half, ${held}:percent:`,
-      ],
+      releases:
+        retention_percent > 0
+          ? [$localize`Retention, first half, ${held}:percent:`, $localize`Retention, second half, ${held}:percent:`]
+          : undefined,
     });
   }
 }

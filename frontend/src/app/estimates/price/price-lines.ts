@@ -6,7 +6,7 @@ import { lineColumns } from './line-columns';
 import { lineRows, type LineRow } from './line-rows';
 import { PriceNames } from './price-names';
 import { PriceSums } from './price-sums';
-import { smallScreen } from './small-screen';
+import { smallScreen } from '../parts/screen-width';
 
 /** The lines of a price by member or by kind of work, with the cost side for those who may see it, and what they come to. */
 @Component({
@@ -20,7 +20,7 @@ import { smallScreen } from './small-screen';
       [columns]="columns()"
       [rows]="rows()"
       [rowId]="rowId"
-      [isHead]="isHead"
+      [isHead]="isHead()"
     />
     <app-price-sums [price]="price()" [taxName]="taxName()" />
   `,
@@ -41,12 +41,15 @@ export class PriceLines {
   readonly cost = input<PriceCost>();
   readonly memberNames = input.required<ReadonlyMap<string, string>>();
   readonly presentation = input.required<'members' | 'kinds'>();
+  /** Only what each section comes to. */
+  readonly sumsOnly = input(false);
   readonly taxName = input<(taxCategoryId: string) => string>(() => '');
 
   protected readonly columns = computed(() =>
     lineColumns(this.formats, { withCost: this.cost() !== undefined, isSmall: this.isSmall() }),
   );
-  protected readonly rows = computed(() =>
+  protected readonly rows = computed(() => this.allRows().filter(({ isHead }) => isHead || !this.sumsOnly()));
+  private readonly allRows = computed(() =>
     lineRows(
       {
         lines: this.price().lines,
@@ -58,5 +61,6 @@ export class PriceLines {
     ),
   );
   protected readonly rowId = ({ id }: LineRow): string => id;
-  protected readonly isHead = ({ isHead }: LineRow): boolean => isHead;
+  /** Sums that stand alone are plain lines. */
+  protected readonly isHead = computed(() => (this.sumsOnly() ? undefined : ({ isHead }: LineRow): boolean => isHead));
 }

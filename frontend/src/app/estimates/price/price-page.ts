@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { Formats } from '../../core/formats/formats';
 import type { Explained } from '../../ui/figure/explained';
@@ -49,6 +49,7 @@ export class PricePage {
   /** The part the address asks for. */
   readonly part = input<string>();
 
+  protected readonly sumsOnly = signal(false);
   protected readonly open = computed<PricePartKey>(() => {
     const offered = this.parts.parts().map(({ key }) => key);
     return pricePartKeys.find((key) => key === this.part() && offered.includes(key)) ?? 'lines';

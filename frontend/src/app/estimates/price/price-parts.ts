@@ -49,7 +49,7 @@ export class PriceParts {
     const margin = cost.marginLeft_percent ?? cost.margin_percent;
     return this.part('profit', $localize`Profit and risk`, {
       about: $localize`margin, contingency, discount, tax`,
-      amount: $localize`${this.formats.number(margin, 1)}:margin: %`,
+      amount: this.formats.figure('percent', Math.round(margin * 10) / 10),
     });
   }
 

@@ -17,8 +17,8 @@ import { profitExplained } from './profit-explained';
       <thead>
         <tr>
           <td></td>
-          <th scope="col" i18n>Margin, of the price</th>
-          <th scope="col" i18n>Mark-up, on the cost</th>
+          <th scope="col" i18n>Margin, % of the price</th>
+          <th scope="col" i18n>Mark-up, % on the cost</th>
           <th scope="col" i18n>Profit</th>
         </tr>
       </thead>
@@ -62,6 +62,6 @@ export class ProfitFigures {
   protected readonly explained = computed(() => profitExplained(this.formats, this.cost()));
 
   protected percent(figure: number | null): string {
-    return figure === null ? '–' : $localize`${this.formats.number(figure, 2, 2)}:percent: %`;
+    return figure === null ? '–' : this.formats.number(figure, 2, 2);
   }
 }

@@ -29,7 +29,24 @@ import { RiskTable } from './risk-table';
   styles: `
     :host {
       display: grid;
-      gap: 24px;
+      gap: 28px;
+    }
+
+    form {
+      display: grid;
+      gap: 12px 16px;
+      grid-template-columns: repeat(2, minmax(0, 1fr));
+      align-items: start;
+    }
+
+    .first {
+      grid-column: 1;
+    }
+
+    @media (max-width: 640px) {
+      form {
+        grid-template-columns: minmax(0, 1fr);
+      }
     }
   `,
 })
@@ -42,11 +59,15 @@ export class ProfitForm {
       key: () => 'profit',
       schema: profitFormSchema,
       present: () => this.entries(),
-      apply: (value) => this.store.changeSettings(profitSettingsOf(value)),
+      apply: (value) => {
+        this.profitBefore = this.store.settings()?.profit ?? this.money()?.profit;
+        this.store.changeSettings(profitSettingsOf(value));
+      },
     },
     noProfitEntries,
   );
 
+  private profitBefore: Profit | undefined;
   private readonly money = computed(() => this.store.card()?.money);
   protected readonly entries = computed<ProfitEntries | undefined>(() => {
     const settings = this.store.settings();
@@ -71,9 +92,11 @@ export class ProfitForm {
 
   /** Changing the way keeps the price where it is. */
   protected takeProfitWay(): void {
-    const { profit, profit_percent } = this.live.group.getRawValue();
-    const before = this.store.settings()?.profit ?? this.money()?.profit;
-    if (before && profit && profit !== 'card' && !(profit_percent ?? '').startsWith('?'))
+    const { profit } = this.live.group.getRawValue();
+    const own = this.store.settings()?.profit;
+    // Where the old percentage could be read the other way it is in the draft already.
+    const before = own?.way === profit ? this.profitBefore : (own ?? this.money()?.profit);
+    if (before && profit && profit !== 'card')
       this.live.group.patchValue({ profit_percent: profitSaidAs(profit, before) });
   }
 

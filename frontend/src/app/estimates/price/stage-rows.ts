@@ -1,5 +1,4 @@
 import type { StagePayments } from '#shared/money/stage-payments';
-import { sumMinor } from '#shared/money/sum-minor';
 import type { Formats } from '../../core/formats/formats';
 import type { FigureColumn } from '../../ui/table/figure-column';
 import type { StageEntry } from './stage-entries';
@@ -18,11 +17,11 @@ export interface StageRow {
 
 const noWork = { work_minor: undefined, recovered_minor: undefined, retained_minor: undefined };
 
-/** The names of payments that are no stage. */
+/** The names of payments that are no stage; undefined where there is no deposit, no retention. */
 export interface StageWords {
-  readonly deposit: string;
+  readonly deposit: string | undefined;
   readonly whole: string;
-  readonly releases: readonly [string, string];
+  readonly releases: readonly [string, string] | undefined;
 }
 
 function stageRows(entries: readonly StageEntry[], payments: StagePayments | undefined, whole: string): StageRow[] {
@@ -40,19 +39,14 @@ export function paymentPlan(
   words: StageWords,
 ): StageRow[] {
   const deposit: StageRow = {
-    ...{ id: 'deposit', kind: 'deposit', name: words.deposit, share: '', ...noWork },
+    ...{ id: 'deposit', kind: 'deposit', name: words.deposit ?? '', share: '', ...noWork },
     paid_minor: payments?.deposit_minor,
   };
-  const releases = words.releases.map((name, place): StageRow => ({
+  const releases = (words.releases ?? []).map((name, place): StageRow => ({
     ...{ id: `release ${place}`, kind: 'release', name, share: '', ...noWork },
     paid_minor: payments?.releases_minor[place],
   }));
-  const isWithheld = payments === undefined || sumMinor(payments.releases_minor) !== 0;
-  return [
-    ...(payments?.deposit_minor === 0 ? [] : [deposit]),
-    ...stageRows(entries, payments, words.whole),
-    ...(isWithheld ? releases : []),
-  ];
+  return [...(words.deposit ? [deposit] : []), ...stageRows(entries, payments, words.whole), ...releases];
 }
 
 type Column = FigureColumn<StageRow>;

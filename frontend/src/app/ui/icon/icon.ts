@@ -12,6 +12,7 @@ import { iconPaths, type IconName } from './icon-paths';
       flex: none;
       width: 24px;
       height: 24px;
+      vertical-align: middle;
     }
 
     svg {
