@@ -14,7 +14,7 @@ import { NG_VALUE_ACCESSOR } from '@angular/forms';
 import { MatAutocomplete, MatAutocompleteTrigger, MatOption } from '@angular/material/autocomplete';
 import { MatIconButton } from '@angular/material/button';
 import { MatDialog } from '@angular/material/dialog';
-import { Subject, catchError, debounceTime, firstValueFrom, of, switchMap } from 'rxjs';
+import { Subject, catchError, debounceTime, firstValueFrom, map, of, switchMap } from 'rxjs';
 import type { Client } from '#shared/jobs/client-schema';
 import { abortable } from '../core/api/abortable';
 import type { ListPage } from '../core/lists/paged-list';
@@ -27,6 +27,10 @@ import { ClientDialog } from './client-dialog';
 
 const afterTheLastKey_ms = 200;
 const offeredAtMost = 8;
+const nobody = { search: '', items: [] };
+
+const inSmall = (text: string): string => text.toLocaleLowerCase();
+const isIn = (name: string, text: string): boolean => inSmall(name).includes(inSmall(text));
 
 /** What can be chosen: a client that was found, or entering the name that was typed. */
 type Choice = Pick<Client, 'id' | 'name'> | 'new';
@@ -46,6 +50,7 @@ export class ClientField extends ValueEntry<string | null> {
   private readonly asked = new Subject<string>();
   private readonly chosen = signal<Pick<Client, 'id' | 'name'> | undefined>(undefined);
   private readonly wasLeft = signal(false);
+  private readonly isEntering = signal(false);
   private readonly unknown = computed(() =>
     this.value() === this.chosen()?.id ? undefined : (this.value() ?? undefined),
   );
@@ -67,11 +72,19 @@ export class ClientField extends ValueEntry<string | null> {
     return this.named.hasValue() ? this.named.value().name : '';
   });
   protected readonly typed = linkedSignal(() => this.name());
-  protected readonly found = signal<readonly Client[]>([]);
+  /** Somebody is being looked for; a client who is chosen already is not changed by a mere Enter. */
+  protected readonly isSearching = computed(() => this.value() === null && this.typed().trim() !== '');
+  private readonly found = signal<{ readonly search: string; readonly items: readonly Client[] }>(nobody);
+  /** Until the answer to what was typed is there, nobody is offered who plainly is not meant. */
+  protected readonly offered = computed(() => {
+    const { search, items } = this.found();
+    const typed = this.typed().trim();
+    return this.isSearching() && search !== typed ? items.filter(({ name }) => isIn(name, typed)) : items;
+  });
   /** Another text makes another option, so that it is the one Enter takes when nobody is found. */
   protected readonly newcomers = computed(() => (this.mayEnter() ? [{ name: this.typed().trim() }] : []));
   protected readonly said = computed(() =>
-    this.wasLeft() && this.value() === null && this.typed().trim() !== ''
+    this.wasLeft() && !this.isEntering() && this.isSearching()
       ? $localize`Choose a client from the list.`
       : this.complaint(),
   );
@@ -83,12 +96,16 @@ export class ClientField extends ValueEntry<string | null> {
     this.asked
       .pipe(
         debounceTime(afterTheLastKey_ms),
+        map((search) => search.trim()),
         switchMap((search) =>
-          abortable((signal) => this.search(search, signal)).pipe(catchError(() => of({ items: [] }))),
+          abortable((signal) => this.search(search, signal)).pipe(
+            map(({ items }) => ({ search, items })),
+            catchError(() => of({ search, items: [] })),
+          ),
         ),
         takeUntilDestroyed(),
       )
-      .subscribe(({ items }) => this.found.set(items));
+      .subscribe((found) => this.found.set(found));
   }
 
   protected type(text: string): void {
@@ -103,9 +120,8 @@ export class ClientField extends ValueEntry<string | null> {
   }
 
   protected leave(): void {
-    const written = this.typed().trim().toLocaleLowerCase();
-    const meant =
-      this.value() === null ? this.found().find(({ name }) => name.toLocaleLowerCase() === written) : undefined;
+    const written = inSmall(this.typed().trim());
+    const meant = this.isSearching() && this.offered().find(({ name }) => inSmall(name) === written);
     if (meant) this.choose(meant);
     this.wasLeft.set(true);
     this.visit();
@@ -113,7 +129,7 @@ export class ClientField extends ValueEntry<string | null> {
 
   protected clear(): void {
     this.forget('');
-    this.found.set([]);
+    this.found.set(nobody);
   }
 
   protected choose(choice: Choice): void {
@@ -125,10 +141,12 @@ export class ClientField extends ValueEntry<string | null> {
   }
 
   private async enter(name: string): Promise<void> {
+    this.isEntering.set(true);
     const options = { data: name, width: '640px', maxWidth: '96vw' };
     const client = await firstValueFrom(
       this.dialog.open<ClientDialog, string, Client>(ClientDialog, options).afterClosed(),
     );
+    this.isEntering.set(false);
     if (client) this.choose(client);
   }
 
@@ -138,6 +156,6 @@ export class ClientField extends ValueEntry<string | null> {
   }
 
   private search(search: string, signal: AbortSignal): Promise<ListPage<Client>> {
-    return this.calls.list({ search: search.trim(), limit: offeredAtMost }, undefined, signal);
+    return this.calls.list({ search, limit: offeredAtMost }, undefined, signal);
   }
 }
