@@ -30,6 +30,8 @@ const onDatabase = (name) => ({
 
 module.exports = {
   maxWorkers: 2,
+  /** A busy machine makes a test slow, not wrong. */
+  testTimeout: 60_000,
   projects: [
     {
       ...createCjsPreset({ tsconfig: '<rootDir>/frontend/tsconfig.spec.json' }),

@@ -3,7 +3,7 @@ import { openAudit, type Audit } from './audit';
 import { benchSheet, issuePapers } from './documents';
 import { openEstimates, type Estimates } from './estimates';
 import { openJobs, type Jobs } from './jobs';
-import { isPage } from './page-places';
+import { isPage } from './is-page';
 import { openWebServer, type WebServer } from './platform/http/web-server';
 import type { MailCatcher } from './platform/mail/mail-catcher';
 import type { Platform } from './platform/platform';

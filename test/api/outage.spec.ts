@@ -5,7 +5,7 @@ import { invite, listInvitations, listPeople } from '#shared/accounts/people-end
 import { askForReset } from '#shared/accounts/password-endpoints';
 import { changeWorkshop, readWorkshop } from '#shared/accounts/workshop-endpoints';
 import { randomUUID } from 'node:crypto';
-import { stopListening } from '../../backend/src/platform/listening-server';
+import { stopListening } from '../../backend/src/platform/listen';
 import { startApi, type Api } from './start-api';
 import { foundingSettings } from './test-workshop';
 
@@ -122,13 +122,18 @@ test('stopping lets every running request finish, and says beforehand that no mo
   const base = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;
   const { workshops } = other.app.accounts;
   const get = workshops.get.bind(workshops);
-  workshops.get = async (id) => pause(700).then(() => get(id));
+  let arrived = 0;
+  workshops.get = async (id) => {
+    arrived += 1;
+    await pause(1_500);
+    return get(id);
+  };
   const { cookie } = other.as('owner');
   const running = Array.from({ length: 40 }, () => fetch(`${base}${readWorkshop.path}`, { headers: { cookie } }));
-  await pause(250);
+  while (arrived < running.length) await pause(10);
   const began = performance.now();
   const stopped = stopListening(server, other.app.web);
-  expect((await fetch(`${base}/readyz`)).status).toBe(503);
+  expect((await other.as('owner').request('get', '/readyz')).status).toBe(503);
   const answers = await Promise.all(running);
   await stopped;
   expect(answers.map(({ status }) => status)).toEqual(running.map(() => 200));

@@ -6,7 +6,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
 import { Database } from '../../backend/src/platform/database/database';
-import { unsafeSettings } from '../../backend/src/platform/database/durability';
+import { unsafeSettings } from '../../backend/src/platform/database/unsafe-settings';
 
 /** `npm start` as a person meets it: begun, begun twice, interrupted, killed, and begun again (ASVS 13.2.2, 13.2.3, 6.3.2). */
 const root = join(__dirname, '../..');

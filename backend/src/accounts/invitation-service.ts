@@ -10,7 +10,7 @@ import type { AccountRepository } from './account-repository';
 import type { InvitationRow } from './invitation-model';
 import type { InvitationRepository } from './invitation-repository';
 import type { Letters } from './letters';
-import { hashOfToken, newToken } from './mailed-token';
+import { hashOfToken, newToken } from './new-token';
 import type { MembershipRepository } from './membership-repository';
 import type { NewcomerService } from './newcomer-service';
 import type { WorkshopService } from './workshop-service';

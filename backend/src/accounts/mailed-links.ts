@@ -2,7 +2,7 @@ import { Rejection } from '#shared/problems/rejection';
 import type { Clock } from '../platform/clock/clock';
 import type { LinkPurpose } from './mailed-link-model';
 import type { MailedLinkRepository } from './mailed-link-repository';
-import { hashOfToken, newToken } from './mailed-token';
+import { hashOfToken, newToken } from './new-token';
 
 export interface NewLink {
   readonly purpose: LinkPurpose;

@@ -2,7 +2,7 @@ import { dictionary } from '@zxcvbn-ts/language-common';
 import type { Complaint } from '#shared/problems/complaint';
 import { Rejection } from '#shared/problems/rejection';
 import type { WordCode, WordValues } from '#shared/words/word-code';
-import { commonPhrases } from './common-phrases';
+import { oftenTriedPhrases } from './often-tried-phrases';
 
 const rows = [
   'abcdefghijklmnopqrstuvwxyz',
@@ -49,7 +49,7 @@ function withoutRuns(text: string): string {
 }
 
 const withoutPhrases = (text: string): string =>
-  commonPhrases.reduce((rest, phrase) => rest.replaceAll(phrase, ''), text);
+  oftenTriedPhrases.reduce((rest, phrase) => rest.replaceAll(phrase, ''), text);
 
 /** A common password, and after it figures or another one; figures may also stand before. */
 function isBuiltOnCommon(text: string): boolean {

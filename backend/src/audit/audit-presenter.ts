@@ -3,7 +3,7 @@ import type { AuditRow } from './audit-model';
 
 type HistoryLine = Omit<HistoryEntry, 'before' | 'after'>;
 
-export const presentLine = (row: AuditRow): HistoryLine => ({
+export const presentAuditLine = (row: AuditRow): HistoryLine => ({
   id: row.id,
   at: row.at.toISOString(),
   accountId: row.accountId,
@@ -13,8 +13,8 @@ export const presentLine = (row: AuditRow): HistoryLine => ({
   values: row.values,
 });
 
-export const presentEntry = (row: AuditRow): HistoryEntry => ({
-  ...presentLine(row),
+export const presentAuditEntry = (row: AuditRow): HistoryEntry => ({
+  ...presentAuditLine(row),
   before: row.before,
   after: row.after,
 });

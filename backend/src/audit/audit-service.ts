@@ -1,7 +1,7 @@
 import { v7 as newId } from 'uuid';
 import type { WordCode, WordValues } from '#shared/words/word-code';
 import type { Clock } from '../platform/clock/clock';
-import { isInTransaction } from '../platform/database/transaction-context';
+import { isInTransaction } from '../platform/database/is-in-transaction';
 import type { Page, PageAsked } from '../platform/database/workshop-rows';
 import type { AuditRow } from './audit-model';
 import type { AuditRepository } from './audit-repository';

@@ -1,6 +1,6 @@
 import type { WhereOptions } from 'sequelize';
 import type { Database } from '../platform/database/database';
-import { outsideTransaction } from '../platform/database/transaction-context';
+import { outsideTransaction } from '../platform/database/is-in-transaction';
 import { WorkshopRows, type VersionedRow, type WorkshopRow } from '../platform/database/workshop-rows';
 import { cardEffectsTable, type CardEffectsRow } from './card-effects-model';
 

@@ -1,5 +1,5 @@
 import type { Database } from './database';
-import { isInTransaction } from './transaction-context';
+import { isInTransaction } from './is-in-transaction';
 
 /** Running numbers of a workshop: each series begins at 1 every year, and has no gaps. */
 export class Counters {

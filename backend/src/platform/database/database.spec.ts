@@ -3,7 +3,7 @@ import { Rejection } from '#shared/problems/rejection';
 import { freshDatabase } from '../../../../test/database/fresh-database';
 import { column } from './columns';
 import { Database, type Table } from './database';
-import { unsafeSettings } from './durability';
+import { unsafeSettings } from './unsafe-settings';
 import { failureOf } from './failure';
 import { WorkshopRows, type VersionedRow } from './workshop-rows';
 

@@ -1,9 +1,9 @@
 import * as mariadb from 'mariadb';
 import { QueryTypes, Sequelize, type ModelAttributes, type ModelStatic } from 'sequelize';
 import type { Model } from 'sequelize';
-import { repeatAfterDeadlock } from './retry';
-import { repairSequelize } from './sequelize-fixes';
-import { isInTransaction } from './transaction-context';
+import { repeatAfterDeadlock } from './repeat-after-deadlock';
+import { repairSequelize } from './repair-sequelize';
+import { isInTransaction } from './is-in-transaction';
 
 export type Row = object;
 export type Table<R extends Row> = ModelStatic<Model<R, R>>;

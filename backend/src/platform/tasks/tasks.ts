@@ -2,7 +2,7 @@ import { randomInt } from 'node:crypto';
 import { v7 as newId } from 'uuid';
 import type { Clock } from '../clock/clock';
 import type { Database } from '../database/database';
-import { isInTransaction, outsideTransaction } from '../database/transaction-context';
+import { isInTransaction, outsideTransaction } from '../database/is-in-transaction';
 import type { Log } from '../log/log';
 
 /** One piece of work to do behind the scenes. `content` must be plain JSON; ids, never whole rows. */

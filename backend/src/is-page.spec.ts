@@ -1,6 +1,6 @@
 import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { isPage } from './page-places';
+import { isPage } from './is-page';
 
 /** The files whose paths stand at the top of the address. */
 const files = ['app-routes.ts', 'accounts/accounts-routes.ts'];

@@ -1,5 +1,5 @@
 /** Long phrases people choose as passwords, written without spaces in small letters (from memory). */
-export const commonPhrases: readonly string[] = [
+export const oftenTriedPhrases: readonly string[] = [
   'correcthorsebatterystaple',
   'thequickbrownfox',
   'jumpsoverthelazydog',
