@@ -201,7 +201,8 @@ describe('EstimateStore', () => {
       rename(ids.edge, 'Now');
       const flushed = store.flush();
       await settle();
-      await expect(flushed).resolves.toBe(true);
+      const left = flushed.then((isKept) => [isKept, TestBed.inject(Saving).hasUnsent()]);
+      await expect(left).resolves.toEqual([true, false]);
       expect(server.member(ids.edge)?.name).toBe('Now');
     });
   });

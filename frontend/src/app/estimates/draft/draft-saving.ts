@@ -70,7 +70,7 @@ export class DraftSaving {
   constructor() {
     this.saving.reset();
     inject(DestroyRef).onDestroy(() => this.saving.reset());
-    effect(() => this.saving.expect(this.draft.unsentCount() + this.unfinished.ids().size));
+    effect(() => this.expectUnsent());
     const typed = this.draft.edited.pipe(debounceTime(afterTheLastKey_ms));
     const hidden = fromEvent(this.window.document, 'visibilitychange').pipe(
       filter(() => this.window.document.visibilityState === 'hidden'),
@@ -91,12 +91,18 @@ export class DraftSaving {
   /** Sends at once; true when the server has everything. */
   async flush(): Promise<boolean> {
     await new Promise<void>((resolve) => this.asks.next(resolve));
+    // Whoever leaves next asks at once, before any effect has run.
+    this.expectUnsent();
     return this.draft.unsentCount() === 0;
   }
 
   /** An item that was refused is edited again, and may be sent again. */
   release(ids: readonly string[]): void {
     this.refused.update((refused) => refused.filter(({ id }) => !ids.includes(id)));
+  }
+
+  private expectUnsent(): void {
+    this.saving.expect(this.draft.unsentCount() + this.unfinished.ids().size);
   }
 
   private untilSent(): Observable<unknown> {
