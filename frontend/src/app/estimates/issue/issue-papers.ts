@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { papers, type Paper } from '#shared/estimates/issue-schema';
+import { Session } from '../../core/session/session';
 import { Icon } from '../../ui/icon/icon';
 import { IssueClient } from './issue-client';
 
@@ -10,6 +11,9 @@ const paperNames: Readonly<Record<Paper, string>> = {
   'leaf-order.pdf': $localize`Leaf order, PDF`,
   'leaf-order.csv': $localize`Leaf order, CSV`,
 };
+
+/** The workbook shows how each line is worked. */
+const withCost: Paper = 'estimate.xlsx';
 
 /** The papers of an issue, byte for byte as they were made when it was issued. */
 @Component({
@@ -39,10 +43,13 @@ const paperNames: Readonly<Record<Paper, string>> = {
 })
 export class IssuePapers {
   private readonly client = inject(IssueClient);
+  private readonly session = inject(Session);
 
   readonly issueId = input.required<string>();
 
   protected readonly list = computed(() =>
-    papers.map((key) => ({ key, name: paperNames[key], address: this.client.paperAddress(this.issueId(), key) })),
+    papers
+      .filter((key) => key !== withCost || this.session.may('owner', 'estimator'))
+      .map((key) => ({ key, name: paperNames[key], address: this.client.paperAddress(this.issueId(), key) })),
   );
 }
