@@ -1,5 +1,5 @@
 import type { CarvingHoursRow, CarvingResult, UseHours } from '#shared/carving/carving-result';
-import { sharpeningRows } from '#shared/carving/hours-rows';
+import { ornamentCarving, sharpeningRows } from '#shared/carving/hours-rows';
 import { patternRows } from '#shared/carving/pattern-hours';
 import { recutRowsOfUse, type RecutZones } from '#shared/carving/recut-hours';
 import type { PriceLabour } from '#shared/estimates/price/price-input';
@@ -25,9 +25,9 @@ function useLabour(use: UseHours, { recut, card, memberOf }: CarvedBy): PriceLab
   return labourOf([...use.rows, ...sharpened, ...recutting], memberOf(use.useId));
 }
 
-/** Zones recut by area, since no ornament of this estimate stands in them. */
+/** Zones recut by area, since nothing is carved on them in this estimate: a blank that is shaped there is not yet ornament. */
 function recutByArea({ result, card, memberOf }: CarvedBy): PriceLabour[] {
-  const carved = new Set(result.uses.filter((use) => use.carving.likely > 0).map((use) => use.zoneId));
+  const carved = new Set(result.uses.filter((use) => ornamentCarving(use.rows).likely > 0).map((use) => use.zoneId));
   const bare = result.recut.filter((zone) => !carved.has(zone.zoneId));
   return bare.map((zone) => ({
     memberId: memberOf(zone.zoneId),
