@@ -23,7 +23,10 @@ export const buildServer = () => build(options);
 
 /** Bundles again at every change and says so. */
 export async function watchServer(onBuilt) {
-  const plugin = { name: 'tell', setup: ({ onEnd }) => onEnd(({ errors }) => errors.length === 0 && onBuilt()) };
+  const tell = ({ errors }) => {
+    if (errors.length === 0) onBuilt();
+  };
+  const plugin = { name: 'tell', setup: ({ onEnd }) => onEnd(tell) };
   const watching = await context({ ...options, plugins: [plugin] });
   await watching.watch();
   return () => watching.dispose();

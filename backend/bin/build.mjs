@@ -1,5 +1,5 @@
 import { spawn } from 'node:child_process';
-import { existsSync } from 'node:fs';
+import { existsSync, rmSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { buildServer } from './build-server.mjs';
@@ -47,8 +47,9 @@ export async function buildWhatChanged(say, { withPages }) {
   }
 }
 
-/** Builds the pages again at every change; answers how to end it. */
+/** Builds the pages again at every change, for development: the next start builds its own. Answers how to end it. */
 export function watchPages() {
+  rmSync(parts[0].stampFile, { force: true });
   const child = spawn(process.execPath, [ng, 'build', '--watch', '--configuration', 'development'], {
     cwd: root,
     stdio: ['ignore', 'inherit', 'inherit'],
