@@ -5,7 +5,7 @@ import { Formats } from '../../core/formats/formats';
 import { EstimateStore } from '../estimate-store';
 import { PartList } from '../parts/part-list';
 import { PartPlace } from '../parts/part-place';
-import { narrowScreen } from '../parts/screen-width';
+import { narrowScreen } from '../../ui/screen/narrow-screen';
 import { PlaceExplanation } from '../places/place-explanation';
 import { AlternativeTotals } from '../price/alternative-totals';
 import { DifferenceTable } from '../price/difference-table';

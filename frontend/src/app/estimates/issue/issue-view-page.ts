@@ -9,7 +9,7 @@ import { Skeleton } from '../../ui/page/skeleton';
 import { EstimateStore } from '../estimate-store';
 import { PartList } from '../parts/part-list';
 import { PartPlace } from '../parts/part-place';
-import { narrowScreen } from '../parts/screen-width';
+import { narrowScreen } from '../../ui/screen/narrow-screen';
 import { PlaceExplanation } from '../places/place-explanation';
 import { MoneyBar } from '../price/money-bar';
 import { DifferenceTable } from '../price/difference-table';

@@ -9,7 +9,7 @@ import { EstimateStore } from '../estimate-store';
 import { AlternativeActions } from './alternative-actions';
 import { AlternativeForm } from './alternative-form';
 import { AlternativeTotals } from './alternative-totals';
-import { smallScreen } from '../parts/screen-width';
+import { smallScreen } from '../../ui/screen/small-screen';
 
 /** Other ways of doing part of the work, each with its own total and what it is more or less than the base. */
 @Component({

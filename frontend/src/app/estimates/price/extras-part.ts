@@ -10,7 +10,7 @@ import { extraColumns, type ExtraRow } from './extra-columns';
 import { ExtraLineForm } from './extra-line-form';
 import { ExtraLinesStore } from './extra-lines-store';
 import { usualExtraNames } from './extra-names';
-import { smallScreen } from '../parts/screen-width';
+import { smallScreen } from '../../ui/screen/small-screen';
 import { usualExtras, type UsualExtra } from './usual-extras';
 
 /** Further lines: work and goods no member carries, added from the card with one press and entered in a dense table. */

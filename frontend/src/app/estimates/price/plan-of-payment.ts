@@ -3,7 +3,7 @@ import type { EstimateSettings } from '#shared/estimates/settings';
 import type { StagePayments } from '#shared/money/stage-payments';
 import { Formats } from '../../core/formats/formats';
 import type { FigureColumn } from '../../ui/table/figure-column';
-import { smallScreen } from '../parts/screen-width';
+import { smallScreen } from '../../ui/screen/small-screen';
 import type { StageEntry } from './stage-entries';
 import { paymentPlan, stageColumns, type StageRow } from './stage-rows';
 

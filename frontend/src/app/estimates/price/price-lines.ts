@@ -6,7 +6,7 @@ import { lineColumns } from './line-columns';
 import { lineRows, type LineRow } from './line-rows';
 import { PriceNames } from './price-names';
 import { PriceSums } from './price-sums';
-import { smallScreen } from '../parts/screen-width';
+import { smallScreen } from '../../ui/screen/small-screen';
 
 /** The lines of a price by member or by kind of work, with the cost side for those who may see it, and what they come to. */
 @Component({
