@@ -139,6 +139,37 @@ describe('lots laid into a working week', () => {
     expect(first?.start_minutes).toBe(7 * day);
   });
 
+  it('lays a ground too large for its limit in portions, each inside it', () => {
+    const ground = step('gesso', 1200, { coats: 8, betweenCoats_minutes: 30, wholeWithin_minutes: 2 * day });
+    const job = plan([lot('a', [ground])]);
+    expect(job.findings).toMatchObject([
+      { kind: 'note', code: 'drying-portions', values: { step: 'gesso', portions: 2 } },
+    ]);
+    for (const portion of [1, 2]) {
+      const tasks = job.tasks.filter((task) => task.portion === portion);
+      expect(tasks).toHaveLength(8);
+      expect(Number(tasks.at(-1)?.end_minutes) - Number(tasks[0]?.start_minutes)).toBeLessThanOrEqual(2 * day);
+    }
+  });
+
+  it('waits for hands that are busy for longer than three weeks, rather than pass a limit', () => {
+    const busy = lot('a', [step('long', 25 * 480)]);
+    const ground = step('gesso', 600, { coats: 2, wholeWithin_minutes: 2 * day });
+    const job = plan([busy, lot('b', [ground])]);
+    expect(job.findings).toEqual([]);
+    expect(job.tasks[1]?.start_minutes).toBe(5 * 7 * day);
+  });
+
+  it('takes smaller portions where that saves days between other work, and not for less', () => {
+    // Two hours are free on every day of the first week: the ground finds room there in portions, or else waits for the next one.
+    const others = [0, 1, 2, 3, 4].map((at) => lot(`other ${at}`, [step('smooth', 360)], {}));
+    const ready_minutes = Object.fromEntries(others.map((one, at) => [one.lotId, at * day]));
+    const ground = step('gesso', 480, { coats: 4, wholeWithin_minutes: day });
+    const job = plan([...others, lot('ground', [ground])], { ready_minutes });
+    expect(job.findings).toMatchObject([{ code: 'drying-portions', values: { step: 'gesso' } }]);
+    expect(Math.max(...job.tasks.map((task) => task.end_minutes))).toBeLessThanOrEqual(5 * day);
+  });
+
   it('waits for approvals: carving from when the lot is ready, a sample from the start', () => {
     const holds_days = { ...noHolds, 'carving-approved': 2, 'sample-approved': 5 };
     const lots = [
