@@ -1,13 +1,29 @@
-import { mkdtempSync } from 'node:fs';
+import { existsSync, mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { installDatabase, startDatabase } from '../../backend/bin/database-server.mjs';
+import { endLeftover, installDatabase, startDatabase } from '../../backend/bin/database-server.mjs';
 import { freePort } from '../../backend/bin/free-port.mjs';
+import { commandOf } from '../../backend/bin/running-process.mjs';
 
-/** Starts one throw-away MariaDB for the whole run; each Jest worker makes a database of its own on it. */
+const prefix = 'bolewright-test-';
+
+/** Clears away the databases of runs that were killed and could not do it themselves. */
+async function clearLeftovers() {
+  for (const name of readdirSync(tmpdir()).filter((one) => one.startsWith(prefix))) {
+    const folder = join(tmpdir(), name);
+    const owner = join(folder, 'owner.pid');
+    if (!existsSync(owner) || commandOf(Number(readFileSync(owner, 'utf8')))) continue;
+    await endLeftover(join(folder, 'database'));
+    rmSync(folder, { recursive: true, force: true });
+  }
+}
+
+/** Starts one throw-away MariaDB for the whole run; each Jest worker makes databases of its own on it. */
 export default async function setUp() {
   if (process.env.TEST_DATABASE_SERVER) return;
-  const folder = mkdtempSync(join(tmpdir(), 'bolewright-test-'));
+  await clearLeftovers();
+  const folder = mkdtempSync(join(tmpdir(), prefix));
+  writeFileSync(join(folder, 'owner.pid'), String(process.pid));
   await installDatabase(join(folder, 'database'));
   const server = await startDatabase({ folder: join(folder, 'database'), port: await freePort(), isThrowAway: true });
   process.env.TEST_DATABASE_SERVER = `mariadb://root@127.0.0.1:${server.port}`;
