@@ -1,0 +1,142 @@
+import { type ComponentFixture, TestBed } from '@angular/core/testing';
+import { MatDialog } from '@angular/material/dialog';
+import { ActivatedRoute, convertToParamMap, provideRouter } from '@angular/router';
+import { of } from 'rxjs';
+import type { Role } from '#shared/actor/role';
+import { EstimateServer, ids, workspaceOn } from '../../../test/estimate-server';
+import { signIn, words } from '../../../test/sign-in';
+import { Notices } from '../../core/problems/notices';
+import { EstimateStore } from '../estimate-store';
+import { MemberList } from './member-list';
+
+describe('MemberList', () => {
+  let server: EstimateServer;
+  let store: EstimateStore;
+  let fixture: ComponentFixture<MemberList>;
+
+  const element = () => fixture.nativeElement as HTMLElement;
+  const rows = () => [...element().querySelectorAll<HTMLElement>('[data-member]')];
+  const row = (id: string) => rows().find((one) => one.dataset['member'] === id) as HTMLElement;
+  const text = (selector: string) => [...element().querySelectorAll(selector)].map((one) => one.textContent?.trim());
+  const settle = async () => {
+    await jest.advanceTimersByTimeAsync(1);
+    fixture.detectChanges();
+    await jest.advanceTimersByTimeAsync(1);
+  };
+  const press = async (id: string, key: string, more: KeyboardEventInit = {}) => {
+    row(id).focus();
+    row(id).dispatchEvent(new KeyboardEvent('keydown', { key, bubbles: true, ...more }));
+    await settle();
+  };
+  const focused = () => (document.activeElement as HTMLElement).dataset['member'];
+
+  async function open(roles: readonly Role[] = ['estimator']): Promise<void> {
+    TestBed.configureTestingModule({
+      providers: [
+        words,
+        provideRouter([]),
+        { provide: ActivatedRoute, useValue: { queryParamMap: of(convertToParamMap({ member: ids.edge })) } },
+        ...workspaceOn(server),
+      ],
+    });
+    signIn(roles);
+    store = TestBed.inject(EstimateStore);
+    void store.open({ jobId: ids.job, estimateId: ids.estimate });
+    await jest.advanceTimersByTimeAsync(1);
+    fixture = TestBed.createComponent(MemberList);
+    document.body.append(fixture.nativeElement as HTMLElement);
+    await settle();
+  }
+
+  beforeEach(() => {
+    jest.useFakeTimers();
+    server = new EstimateServer();
+  });
+  afterEach(() => {
+    element().remove();
+    jest.useRealTimers();
+  });
+
+  it('shows each member with its shape, and how many or how long', async () => {
+    await open();
+    expect(text('.name')).toEqual(['Top edge', 'Leg']);
+    expect(text('.about')).toEqual(['rectangle', 'straight leg']);
+    expect(text('.amount')).toEqual(['1', '× 2']);
+    expect(rows().map((one) => one.getAttribute('aria-current'))).toEqual(['true', null]);
+  });
+
+  it('is walked through with the arrows', async () => {
+    await open();
+    await press(ids.edge, 'ArrowDown');
+    expect(focused()).toBe(ids.leg);
+    await press(ids.leg, 'ArrowUp');
+    expect(focused()).toBe(ids.edge);
+  });
+
+  it('moves a member with Alt and the arrows, and stays with it', async () => {
+    await open();
+    await press(ids.edge, 'ArrowDown', { altKey: true });
+    expect([text('.name'), focused()]).toEqual([['Leg', 'Top edge'], ids.edge]);
+    await press(ids.edge, 'ArrowUp', { altKey: true });
+    expect(text('.name')).toEqual(['Top edge', 'Leg']);
+  });
+
+  it('removes a member without asking, and offers it back', async () => {
+    await open();
+    await press(ids.leg, 'Delete');
+    expect([text('.name'), focused()]).toEqual([['Top edge'], ids.edge]);
+    TestBed.inject(Notices).current()[0].action?.run();
+    await settle();
+    expect(text('.name')).toEqual(['Top edge', 'Leg']);
+  });
+
+  it('groups members by piece where there are several, and moves one into the next', async () => {
+    const other = '018f0000-0000-7000-8000-000000000166';
+    server.pieces.push({ id: other, version: 1, content: { name: 'Plinth', place: 5, note: '' } });
+    await open();
+    expect(text('.piece h3')).toEqual(['Base', 'Plinth']);
+    await press(ids.leg, 'ArrowDown', { altKey: true });
+    expect(store.members().find(({ id }) => id === ids.leg)?.pieceId).toBe(other);
+    await press(ids.leg, 'ArrowUp', { altKey: true });
+    expect(store.members().map(({ id, pieceId }) => [id, pieceId])).toEqual([
+      [ids.edge, ids.piece],
+      [ids.leg, ids.piece],
+    ]);
+  });
+
+  it('adds a member of the shape one chooses, at the end and of the same timber', async () => {
+    await open();
+    jest.spyOn(TestBed.inject(MatDialog), 'open').mockReturnValue({ afterClosed: () => of('bun-foot') } as never);
+    [...element().querySelectorAll('button')].find((one) => one.textContent?.includes('Add a member'))?.click();
+    await settle();
+    await settle();
+    const added = store.members().at(-1);
+    expect([added?.name, added?.shape.kind, added?.timberId, added?.pieceId]).toEqual([
+      'Bun foot',
+      'bun-foot',
+      'lime',
+      ids.piece,
+    ]);
+  });
+
+  it('begins an empty estimate with a piece', async () => {
+    [server.pieces, server.members] = [[], []];
+    await open();
+    jest.spyOn(TestBed.inject(MatDialog), 'open').mockReturnValue({ afterClosed: () => of('sphere') } as never);
+    [...element().querySelectorAll('button')].find((one) => one.textContent?.includes('Add a member'))?.click();
+    await settle();
+    await settle();
+    await jest.advanceTimersByTimeAsync(700);
+    expect(server.members.map((one) => one.content.pieceId)).toEqual(server.pieces.map(({ id }) => id));
+    expect(server.arrived).toHaveLength(1);
+  });
+
+  it('lets the bench look, and change nothing', async () => {
+    server.isPriced = false;
+    await open(['bench']);
+    await press(ids.leg, 'Delete');
+    await press(ids.leg, 'ArrowUp', { altKey: true });
+    expect(text('.name')).toEqual(['Top edge', 'Leg']);
+    expect(element().textContent).not.toContain('Add a member');
+  });
+});
