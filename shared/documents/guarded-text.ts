@@ -1,5 +1,5 @@
 const taken = /^\s*[=+\-@\t\r\n\uff1d\uff0b\uff0d\uff20]/;
-// eslint-disable-next-line no-control-regex -- XML and spreadsheets know none of these
+// XML and spreadsheets know none of these.
 const unwritable = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\ufffe\uffff]/g;
 
 /**

@@ -41,8 +41,8 @@ const zoneOf = (id: string, share_percent: number): fc.Arbitrary<Zone> =>
         ...{ name: id, take: { way: 'share', share_percent }, buildUpId, leafId },
         laying: { way: 'proposed', strips, cuts: null },
         ...rest,
-        finish: rest.finish as Zone['finish'],
-        recutting: rest.recutting as Zone['recutting'],
+        finish: rest.finish,
+        recutting: rest.recutting,
       }),
     );
 

@@ -4,6 +4,7 @@ export function fileName(parts: readonly string[], ending: string): string {
     .map((part) =>
       part
         .normalize('NFKD')
+        .replace(/\p{M}/gu, '')
         .replace(/[^A-Za-z0-9.]+/g, '-')
         .replace(/^[-.]+|[-.]+$/g, ''),
     )

@@ -1,7 +1,7 @@
 import { minorOf } from '#shared/money/minor-of';
 import { bookletTable } from './booklet-table';
 import type { LeafRates } from './goods-rates';
-import { countedUp, roundedMinor } from './rounded';
+import { countedUp, roundedMinor, settledFormula } from './rounded';
 import { formula, type Sheet } from './sheet';
 import type { WorkbookFacts } from './workbook-facts';
 
@@ -32,7 +32,7 @@ function productRow(
   const row = sheet.next;
   const [gross, count] = [sheet.here(spans.at.gross, row), sheet.here(spans.at.booklets, row)];
   const bought = bookletTable(spans.booklets, leaf, { facts, need: total?.booklets ?? 0 });
-  const byTheLeaf = `${leaf.price}*${10 ** price.digits}*${gross}/${leaf.inBooklet}`;
+  const byTheLeaf = `${leaf.price}*${10 ** price.digits}*${settledFormula(gross)}/${leaf.inBooklet}`;
   const cost = snapshot.card.leaf.charge === 'booklets' ? bought(count) : byTheLeaf;
   sheet.add([
     ...[null, null, null, name, number, null],
