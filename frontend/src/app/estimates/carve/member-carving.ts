@@ -4,7 +4,7 @@ import type { OrnamentExtent } from '#shared/carving/ornament-use';
 import type { Member } from '#shared/estimates/member';
 import { gradeHours, HoursTable, OrnamentForm, OrnamentPicker, RunDrawing, stageHours } from '../../carving';
 import { Formats } from '../../core/formats/formats';
-import { smallScreen } from '../parts/screen-width';
+import { smallScreen } from '../../ui/screen/small-screen';
 import { EntryAt, type EntryChoice } from '../../ui/field/entry-at';
 import { FigureTable } from '../../ui/table/figure-table';
 import { EstimateStore } from '../estimate-store';

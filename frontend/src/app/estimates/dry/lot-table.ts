@@ -4,7 +4,7 @@ import { Formats } from '../../core/formats/formats';
 import type { WorkedLot } from '../../drying';
 import type { FigureColumn } from '../../ui/table/figure-column';
 import { FigureTable } from '../../ui/table/figure-table';
-import { smallScreen } from '../parts/screen-width';
+import { smallScreen } from '../../ui/screen/small-screen';
 
 /** The lots with their hands-on and waiting time, and on which days they are in work. */
 @Component({

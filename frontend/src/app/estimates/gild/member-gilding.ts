@@ -9,7 +9,7 @@ import { Icon } from '../../ui/icon/icon';
 import { FigureTable } from '../../ui/table/figure-table';
 import { EstimateStore } from '../estimate-store';
 import { memberAbout } from '../places/member-about';
-import { smallScreen } from '../parts/screen-width';
+import { smallScreen } from '../../ui/screen/small-screen';
 import { MemberZones } from './member-zones';
 import { ZoneColumns } from './zone-columns';
 import { ZoneForm } from './zone-form';
