@@ -195,8 +195,9 @@ describe('Laws of a whole estimate', () => {
         expect(likelyHours(after)).toBeCloseTo(likelyHours(before), 9);
         expect(after.tally.true_mm2).toBeCloseTo(before.tally.true_mm2, 4);
         expect(after.tally.booklets).toBe(before.tally.booklets);
-        expect(after.cost.price.direct_minor).toBe(before.cost.price.direct_minor);
-        expect(after.cost.price.overhead_minor).toBe(before.cost.price.overhead_minor);
+        // A pattern is charged where its ornament stands first, and hours enter money with six decimals on each line: at most a cent.
+        for (const sum of ['direct_minor', 'overhead_minor'] as const)
+          expect(Math.abs(after.cost.price[sum] - before.cost.price[sum])).toBeLessThanOrEqual(1);
         expect(after.materials).toEqual(before.materials);
       }),
       few,
