@@ -32,7 +32,7 @@ export interface DrawingSetting {
   readonly isForTheBench: boolean;
 }
 
-const shownNames = 4;
+const shownNames = 2;
 
 function captionOf(names: readonly string[], { say }: PaperWords): string {
   const shown = names.slice(0, shownNames).join(', ');

@@ -6,7 +6,7 @@ import { textLines, writeLine } from './paper/text-lines';
 import type { PaperWords } from './paper-words';
 
 const logoBox = [190, 58] as const;
-const addressWidth_pt = 200;
+const addressWidth_pt = 210;
 
 /** The workshop as a letterhead shows it. */
 export interface Letterhead {

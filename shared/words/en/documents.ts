@@ -28,6 +28,7 @@ export const documents = {
   'paper-tax': '{name}: {rate_percent} of {net_minor}',
   'paper-untaxed': '{name}, on {net_minor}',
   'paper-total': 'Total',
+  'paper-total-with-tax': '{total_minor}, tax included',
 
   'paper-alternatives': 'Other ways of doing it',
   'paper-alternatives-note':

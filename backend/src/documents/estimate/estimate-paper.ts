@@ -22,7 +22,7 @@ const titleOf = ({ snapshot }: IssueContent): string =>
   snapshot.draft.settings.title.trim() === '' ? snapshot.job.title : snapshot.draft.settings.title;
 
 function addressOf(pdf: Pdf, { snapshot, words }: IssueContent): Block {
-  const { client, job, issuedOn, validUntil, issuedBy, estimate } = snapshot;
+  const { client, job, issuedOn, validUntil, issuedBy, estimate, figures } = snapshot;
   return addressBlock(pdf, {
     address: [client.name, client.contact, client.address],
     particulars: [
@@ -33,6 +33,7 @@ function addressOf(pdf: Pdf, { snapshot, words }: IssueContent): Block {
       [words.say('paper-reference'), job.reference],
       [words.say('paper-site'), job.site],
       [words.say('paper-issued-by'), issuedBy],
+      [words.say('paper-total'), words.say('paper-total-with-tax', { total_minor: figures.price.gross_minor })],
     ],
   });
 }
