@@ -109,7 +109,8 @@ function patternRows({ facts, sheet }: Page): void {
 /** Zones recut although nothing is carved on them in this estimate go by their plan area. */
 function bareRows({ facts, sheet, takeOff, rates }: Page): void {
   const { carving, zones, members } = facts.prepared.work;
-  const carved = new Set(carving.uses.filter((use) => use.carving.likely > 0).map((use) => use.zoneId));
+  const isCarved = (use: UseHours) => likelyOf(use, ['stage', 'undercutting', 'free']) > 0;
+  const carved = new Set(carving.uses.filter(isCarved).map((use) => use.zoneId));
   for (const recut of carving.recut.filter(({ zoneId }) => !carved.has(zoneId))) {
     const zone = zones.find((one) => one.zone.id === recut.zoneId);
     const manner = zone?.zone.recutting;

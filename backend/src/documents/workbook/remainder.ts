@@ -6,12 +6,17 @@
 /** What is taken off for a place, from 1 on: less than any real difference. */
 export const placeWeight = (place: number): string => (place * 1e-12).toFixed(12);
 
+/** An exact share without what floating point leaves in it: a whole one stays whole. */
+export const shareFormula = (share: string): string => `ROUND(${share},8)`;
+
 export const remainderFormula = (share: string, place: number): string =>
   `ROUND(${share}-TRUNC(${share}),8)-${placeWeight(place)}`;
 
 /** The same, worked here. */
-export const remainderOf = (share: number, place: number): number =>
-  Number((share - Math.trunc(share)).toFixed(8)) - place * 1e-12;
+export function remainderOf(share: number, place: number): number {
+  const exact = Number(share.toFixed(8));
+  return Number((exact - Math.trunc(exact)).toFixed(8)) - place * 1e-12;
+}
 
 /** The least remainder that still gets one more; above all of them where nothing is left. */
 export function thresholdFormula(remainders: string): string {

@@ -2,7 +2,7 @@ import type { ContingencyCells } from './price-line-rows';
 import { lineCells } from './price-line-formulas';
 import type { PricePage } from './price-parts';
 import { minorOfAmount } from './rounded';
-import { remainderFormula, remainderOf, thresholdFormula, thresholdOf } from './remainder';
+import { remainderFormula, remainderOf, shareFormula, thresholdFormula, thresholdOf } from './remainder';
 import { formula } from './sheet';
 import type { NumberedLine } from './workbook-facts';
 
@@ -30,7 +30,7 @@ export function riskContingency(
   const total = lines.reduce((sum, { priced }) => sum + priced.direct.toNumber(), 0);
   const amount_minor = facts.price.contingency.way === 'risk' ? facts.price.contingency.amount_minor : 0;
   return (row, { priced, number }) => {
-    const share = `${amount}*${lineCells(page, row).direct}/${whole}`;
+    const share = shareFormula(`${amount}*${lineCells(page, row).direct}/${whole}`);
     const key = sheet.here(columns.remainder ?? 0, row);
     const value = total === 0 ? 0 : (amount_minor * priced.direct.toNumber()) / total;
     return [

@@ -5,7 +5,7 @@ import { settled } from '#shared/money/settled';
 import { splitByLargestRemainder } from '#shared/money/split-by-largest-remainder';
 import type { LeafPages } from './leaf-sheet';
 import type { MaterialsPage } from './materials-sheet';
-import { remainderFormula, remainderOf, thresholdFormula, thresholdOf } from './remainder';
+import { remainderFormula, remainderOf, shareFormula, thresholdFormula, thresholdOf } from './remainder';
 import { formula, input, Sheet } from './sheet';
 import { lineNumber, type WorkbookFacts } from './workbook-facts';
 
@@ -29,7 +29,7 @@ interface ItemPlace {
 function shareRow(sheet: Sheet, place: number, { cost, weights, threshold }: ItemPlace) {
   const row = sheet.next;
   const [weight, remainder] = [sheet.here(at.weight, row), sheet.here(at.remainder, row)];
-  const share = `${cost}*${weight}/${weights}`;
+  const share = shareFormula(`${cost}*${weight}/${weights}`);
   return {
     remainder: remainderFormula(share, place),
     part: `TRUNC(${share})+IF(${remainder}>=${threshold},1,0)`,

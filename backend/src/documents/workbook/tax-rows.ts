@@ -4,7 +4,7 @@ import { sumMinor } from '#shared/money/sum-minor';
 import { linePlace } from './price-columns';
 import { amountOf } from './price-line-rows';
 import type { PricePage } from './price-parts';
-import { placeWeight } from './remainder';
+import { placeWeight, shareFormula } from './remainder';
 import { minorOfAmount, roundedAmount } from './rounded';
 import { formula, type FormulaCell } from './sheet';
 import { taxNumber } from './tax-number';
@@ -40,7 +40,7 @@ function taxFigures({ facts }: PricePage): TaxFigures[] {
   );
   const whole = sumMinor(sums);
   const parts = splitByLargestRemainder(discount_minor, sums);
-  const exacts = sums.map((sum) => (whole === 0 ? 0 : (discount_minor * sum) / whole));
+  const exacts = sums.map((sum) => (whole === 0 ? 0 : Number(((discount_minor * sum) / whole).toFixed(8))));
   const left = discount_minor - exacts.reduce((sum, one) => sum + Math.trunc(one), 0);
   return taxes.map((tax, place) => ({
     ...{ tax, lines_minor: sums[place], exact: exacts[place], part_minor: parts[place] },
@@ -76,7 +76,7 @@ function discountFormulas(
   const threshold = `LARGE(${table.span('remainder')},MAX(1,ABS(${left})))`;
   const whole = `SUM(${table.span('lines')})`;
   return {
-    exact: `IF(${whole}=0,0,${minor}*${table.at('lines', row)}/${whole})`,
+    exact: `IF(${whole}=0,0,${shareFormula(`${minor}*${table.at('lines', row)}/${whole}`)})`,
     remainder: `ROUND((${exact}-TRUNC(${exact}))*SIGN(${left}),8)-${placeWeight(row - table.first + 1)}`,
     part: `TRUNC(${exact})+IF(${left}=0,0,IF(${remainder}>=${threshold},SIGN(${left}),0))`,
   };
