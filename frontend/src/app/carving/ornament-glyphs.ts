@@ -7,13 +7,15 @@ export interface GlyphBox {
 }
 
 /** Commands with their points in a box of 1 by 1. */
-type Stroke = readonly [command: string, ...points: readonly (readonly [x: number, y: number])[]];
+type Point = readonly [x: number, y: number];
+type Stroke = readonly [command: string, ...points: readonly Point[]];
 type Glyph = readonly Stroke[];
 
 /** How far a handle stands off so that four curves come as near to a circle as can be seen. */
 const round = 0.2761;
 
-function oval(x: number, y: number, across: number, down: number): Glyph {
+/** An oval about a point, so wide and so high. */
+function oval([x, y]: Point, [across, down]: Point): Glyph {
   const [rx, ry, hx, hy] = [across / 2, down / 2, across * round, down * round];
   return [
     ['M', [x - rx, y]],
@@ -25,7 +27,7 @@ function oval(x: number, y: number, across: number, down: number): Glyph {
   ];
 }
 
-const line = (...points: readonly (readonly [number, number])[]): Glyph =>
+const line = (...points: readonly Point[]): Glyph =>
   points.map((point, index) => [index === 0 ? 'M' : 'L', point] as const);
 
 const lozenge: Glyph = [...line([0.5, 0.1], [0.95, 0.5], [0.5, 0.9], [0.05, 0.5]), ['Z']];
@@ -58,10 +60,14 @@ const husk: Glyph = [
 ];
 
 const glyphs: Readonly<Record<string, Glyph>> = {
-  'egg-and-dart': [...oval(0.44, 0.5, 0.66, 0.92), ...line([0.95, 0.06], [0.95, 0.94])],
-  'bead-and-reel': [...oval(0.34, 0.5, 0.6, 0.6), ...oval(0.75, 0.5, 0.14, 0.6), ...oval(0.92, 0.5, 0.14, 0.6)],
+  'egg-and-dart': [...oval([0.44, 0.5], [0.66, 0.92]), ...line([0.95, 0.06], [0.95, 0.94])],
+  'bead-and-reel': [
+    ...oval([0.34, 0.5], [0.6, 0.6]),
+    ...oval([0.75, 0.5], [0.14, 0.6]),
+    ...oval([0.92, 0.5], [0.14, 0.6]),
+  ],
   'leaf-and-tongue': tongue,
-  guilloche: [...wave(true), ...wave(false), ...oval(0.5, 0.5, 0.26, 0.26)],
+  guilloche: [...wave(true), ...wave(false), ...oval([0.5, 0.5], [0.26, 0.26])],
   gadroon: lobe,
   'ribbon-and-stick': [
     ...line([0.05, 0.95], [0.5, 0.05], [0.8, 0.05], [0.35, 0.95]),
@@ -84,7 +90,7 @@ const mitreRight: Glyph = mitre.map(([command, ...points]) => [
   command,
   ...points.map(([x, y]) => [1 - x, y] as const),
 ]);
-const centre: Glyph = [...oval(0.5, 0.5, 0.96, 0.96), ...oval(0.5, 0.5, 0.4, 0.4)];
+const centre: Glyph = [...oval([0.5, 0.5], [0.96, 0.96]), ...oval([0.5, 0.5], [0.4, 0.4])];
 
 const drawn = (glyph: Glyph, { x, y, width, height }: GlyphBox): string =>
   glyph

@@ -33,7 +33,7 @@ import { catalogueGroups, catalogueNames, type CatalogueEntry, foundEntries } fr
         autoActiveFirstOption
         hideSingleSelectionIndicator
         [displayWith]="nameOf"
-        (optionSelected)="take($event)"
+        (optionSelected)="take($event, entry)"
       >
         @for (group of groups(); track group.kind) {
           <mat-optgroup [label]="names[group.kind]">
@@ -62,8 +62,10 @@ export class OrnamentPicker {
   protected readonly nameOf = (id: string | null): string =>
     this.catalogue().find((entry) => entry.id === id)?.name ?? id ?? '';
 
-  protected take({ option }: MatAutocompleteSelectedEvent): void {
+  protected take({ option }: MatAutocompleteSelectedEvent, typed: HTMLInputElement): void {
     this.sought.set(undefined);
+    // What is chosen goes out; where it comes back it stands here, else the entry is ready for another.
+    typed.value = this.text();
     const entry = this.catalogue().find(({ id }) => id === option.value);
     if (entry) this.picked.emit(entry);
   }

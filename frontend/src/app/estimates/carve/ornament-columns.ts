@@ -6,7 +6,7 @@ import { Words } from '../../core/formats/words';
 import { reliefNames } from '../../measure';
 import type { Explained } from '../../ui/figure/explained';
 import type { FigureColumn } from '../../ui/table/figure-column';
-import { EstimateStore } from '../estimate-store';
+import type { EstimateStore } from '../estimate-store';
 import { explainedBy } from '../places/explained-by';
 import type { OrnamentRow } from './ornament-row';
 

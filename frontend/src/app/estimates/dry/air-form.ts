@@ -11,7 +11,9 @@ import { NumberField } from '../../ui/field/number-field';
 import type { Explained } from '../../ui/figure/explained';
 import { Figure } from '../../ui/figure/figure';
 import { FindingList } from '../../ui/page/finding-list';
+import { gatheredFindings } from '../../drying';
 import { EstimateStore } from '../estimate-store';
+import { isOfAir } from './is-of-air';
 import { liveForm } from '../settings/live-form';
 
 const airSchema = settingsSchema.pick({ shop: true, site: true, place: true });
@@ -81,7 +83,10 @@ export class AirForm {
       return [{ model, name: dryingNames[model], explained, isClipped }];
     }),
   );
-  protected readonly findings = computed(() => this.factors().flatMap(({ findings }) => findings));
+  /** What the air of the shop does to everything that dries in it, said once. */
+  protected readonly findings = computed(() =>
+    gatheredFindings((this.store.figures()?.findings ?? []).filter(isOfAir)).map(({ finding }) => finding),
+  );
 
   private air({ temperature_celsius, humidity_percent }: EstimateSettings['shop']): string {
     return [this.formats.figure('celsius', temperature_celsius), this.formats.figure('percent', humidity_percent)].join(

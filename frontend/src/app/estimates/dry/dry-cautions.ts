@@ -3,6 +3,7 @@ import type { Finding } from '#shared/words/finding';
 import { gatheredFindings, type GatheredFinding } from '../../drying';
 import { EstimateStore } from '../estimate-store';
 import { DryLots } from './dry-lots';
+import { isOfAir } from './is-of-air';
 
 /** Told beside its step, not among what concerns the whole. */
 const besideStep = ['drying-hold-', 'drying-missed-'];
@@ -18,8 +19,10 @@ export class DryCautions {
   private readonly all = computed<readonly GatheredFinding[]>(() =>
     gatheredFindings(
       (this.store.figures()?.findings ?? []).filter(
-        ({ code }) =>
-          own.some((start) => code.startsWith(start)) && !besideStep.some((start) => code.startsWith(start)),
+        (finding) =>
+          own.some((start) => finding.code.startsWith(start)) &&
+          !besideStep.some((start) => finding.code.startsWith(start)) &&
+          !isOfAir(finding),
       ),
     ),
   );

@@ -4,7 +4,7 @@ import { Formats } from '../../core/formats/formats';
 import { Words } from '../../core/formats/words';
 import type { Explained } from '../../ui/figure/explained';
 import type { FigureColumn } from '../../ui/table/figure-column';
-import { EstimateStore } from '../estimate-store';
+import type { EstimateStore } from '../estimate-store';
 import { explainedBy } from '../places/explained-by';
 import type { ZoneRow } from './zone-row';
 

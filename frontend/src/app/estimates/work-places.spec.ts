@@ -1,0 +1,203 @@
+import type { Type } from '@angular/core';
+import { TestBed } from '@angular/core/testing';
+import { ActivatedRoute, convertToParamMap, provideRouter } from '@angular/router';
+import { BehaviorSubject, map } from 'rxjs';
+import type { Role } from '#shared/actor/role';
+import type { MemberOrnament } from '#shared/estimates/member';
+import { EstimateServer, ids, workspaceOn, zone } from '../../test/estimate-server';
+import { signIn, words } from '../../test/sign-in';
+import { CarvePage } from './carve/carve-page';
+import { DryPage } from './dry/dry-page';
+import { EstimateStore } from './estimate-store';
+import { GildPage } from './gild/gild-page';
+import { ZoneSpread } from './gild/zone-spread';
+
+const id = (number: number) => `018f0000-0000-7000-8000-0000000009${number}`;
+const eggAndDart: MemberOrnament = {
+  id: id(10),
+  ornamentId: 'egg-and-dart',
+  extent: { way: 'run', run_mm: 900, runs: 1, mitreLeaf_mm: 0, mitreLeaves: 0, centre_mm: null },
+  size_mm: null,
+  relief: 'middle',
+  isUndercut: false,
+  plan: 'straight',
+  isMirrored: false,
+  joinsLearning: false,
+  hasOwnPattern: false,
+  zoneId: null,
+  alternativeId: null,
+};
+
+/** A page of one estimate on a server of its own; the member asked for stands in `member`. */
+async function open<Page>(page: Type<Page>, roles: readonly Role[] = ['estimator']) {
+  const server = new EstimateServer();
+  server.changeElsewhere(ids.edge, { ornaments: [eggAndDart] });
+  if (!roles.includes('estimator')) server.isPriced = false;
+  const member = new BehaviorSubject<string | null>(ids.edge);
+  const queryParamMap = member.pipe(map((asked) => convertToParamMap(asked === null ? {} : { member: asked })));
+  TestBed.configureTestingModule({
+    providers: [
+      words,
+      provideRouter([]),
+      { provide: ActivatedRoute, useValue: { queryParamMap } },
+      ...workspaceOn(server),
+      ZoneSpread,
+    ],
+  });
+  signIn(roles);
+  const store = TestBed.inject(EstimateStore);
+  void store.open({ jobId: ids.job, estimateId: ids.estimate });
+  await jest.advanceTimersByTimeAsync(1);
+  const fixture = TestBed.createComponent(page);
+  const element = fixture.nativeElement as HTMLElement;
+  const settle = async () => {
+    for (const _round of [1, 2]) {
+      await jest.advanceTimersByTimeAsync(1);
+      fixture.detectChanges();
+    }
+  };
+  await settle();
+  const rows = () =>
+    [...element.querySelectorAll('app-figure-table tbody tr')].map((row) =>
+      [...row.querySelectorAll('td')].map((cell) => cell.textContent?.trim().replace(/[\s\u00a0]+/g, ' ')),
+    );
+  const entry = (label: string) => {
+    const found = [...element.querySelectorAll('label')].find((one) => one.textContent?.trim().startsWith(label));
+    return element.querySelector(`#${found?.htmlFor}`) as HTMLInputElement & HTMLSelectElement;
+  };
+  const type = async (label: string, text: string) => {
+    entry(label).value = text;
+    entry(label).dispatchEvent(new Event('input'));
+    await settle();
+  };
+  const press = async (text: string) => {
+    const button = [...element.querySelectorAll('button')].find((one) => one.textContent?.trim() === text);
+    button?.click();
+    await settle();
+  };
+  return { element, entry, member, press, rows, settle, store, type };
+}
+
+describe('The places of work', () => {
+  beforeEach(() => jest.useFakeTimers());
+  afterEach(() => jest.useRealTimers());
+
+  describe('Carve', () => {
+    it('fits the repeats anew while a length is typed', async () => {
+      const { rows, type, store } = await open(CarvePage);
+      // 900 mm hold thirty repeats of 30 mm as they are drawn; 950 mm thirty-two, pressed by 1 %.
+      expect(rows()[0]?.slice(0, 3)).toEqual(['Egg and dart middle', '900 mm', '30 of 30 mm as drawn']);
+      await type('Length of a run', '95 cm');
+      expect(rows()[0]?.[2]).toBe('32 of 29.7 mm pressed 1%');
+      const member = store.members().find((one) => one.id === ids.edge);
+      expect(member?.ornaments[0]?.extent).toMatchObject({ run_mm: 950 });
+      expect(member?.typed['ornaments.0.extent.run_mm']).toBe('95 cm');
+    });
+
+    it('keeps what cannot be read out of the draft, and says so', async () => {
+      const { element, type, store } = await open(CarvePage);
+      await type('Runs on one member', 'some');
+      expect(element.querySelector('[role="alert"]')?.textContent).toBeTruthy();
+      const extent = store.members().find((one) => one.id === ids.edge)?.ornaments[0]?.extent;
+      expect(extent).toMatchObject({ runs: 1 });
+    });
+
+    it('takes an ornament away, and tells the rest of the job by ornament', async () => {
+      const { element, member, press, rows, settle } = await open(CarvePage);
+      member.next(null);
+      await settle();
+      expect(element.querySelector('h2')?.textContent).toBeTruthy();
+      expect(rows()[0]?.slice(0, 2)).toEqual(['Egg and dart', '30']);
+      member.next(ids.edge);
+      await settle();
+      await press('Remove');
+      expect(element.textContent).toContain('Nothing is carved on this member yet.');
+    });
+
+    it('shows the bench the hours and no entry', async () => {
+      const { element, rows } = await open(CarvePage, ['bench']);
+      expect(rows()[0]?.[0]).toBe('Egg and dart middle');
+      expect(element.querySelector('app-ornament-form, app-ornament-picker')).toBeNull();
+      expect(element.textContent).toContain('Modelling');
+    });
+  });
+
+  describe('Gild', () => {
+    const column = (row: readonly (string | undefined)[] | undefined, key: number) => row?.[key];
+
+    it('shows each zone with its leaf at the list price, and follows another build-up', async () => {
+      const { entry, rows, settle, store } = await open(GildPage);
+      const [first] = rows();
+      const leaves = Number(column(first, 4));
+      // A booklet of 25 leaves costs 52.00, so each leaf 2.08.
+      expect(Number(column(first, 5))).toBeCloseTo(leaves * 2.08, 0);
+      const build = entry('Build-up');
+      build.value = 'white-glazes';
+      build.dispatchEvent(new Event('change'));
+      await settle();
+      expect(column(rows()[0], 1)).toBe('White ground with transparent glazes');
+      expect(column(rows()[0], 2)).toBe('no leaf');
+      const [changed] = store.members().find((one) => one.id === ids.edge)?.zones ?? [];
+      expect([changed?.buildUpId, changed?.leafId]).toEqual(['white-glazes', null]);
+    });
+
+    it('adds a zone for what the others leave', async () => {
+      const { press, rows, type } = await open(GildPage);
+      await type('Share of the surface', '70');
+      await press('Add a zone');
+      expect(rows()).toHaveLength(2);
+      expect(rows().map((row) => row[0])).toEqual(['All of it', 'Zone 2']);
+      // 1000 × 60 mm: 420 and 180 cm².
+      expect(rows().map((row) => row[3])).toEqual(['420 cm²', '180 cm²']);
+    });
+
+    it('shows the bench no money', async () => {
+      const { element, rows } = await open(GildPage, ['bench']);
+      expect(rows()[0]).toHaveLength(5);
+      expect(element.textContent).not.toContain('€');
+      expect(element.querySelector('app-zone-form')).toBeNull();
+    });
+
+    it('lays a build-up on a zone and on a bare member in one step that can be undone', async () => {
+      const { store } = await open(GildPage);
+      const spread = TestBed.inject(ZoneSpread);
+      const source = zone({ id: id(20), name: 'Source', buildUpId: 'oil-12-hour', chosenStepIds: ['seal'] });
+      const targets = spread.question(source).groups.flatMap((group) => group.targets);
+      expect(targets.map(({ zoneId }) => zoneId !== null)).toEqual([true, false]);
+      spread.lay(source, targets);
+      const laid = () => store.members().map(({ zones }) => zones.map(({ buildUpId }) => buildUpId));
+      expect(laid()).toEqual([['oil-12-hour'], ['oil-12-hour']]);
+      store.undo();
+      expect(laid()).toEqual([['water-burnished'], []]);
+    });
+  });
+
+  describe('Dry', () => {
+    it('tells lots, steps and batches, and lays them anew in another air', async () => {
+      const { element, rows, store, type } = await open(DryPage);
+      expect(rows()[0]?.[0]).toBe('Water gilding, burnished');
+      expect(element.querySelector('app-lot-steps')?.textContent).toContain('Gesso');
+      expect(element.querySelector('app-batch-list')?.textContent).toContain('Dry glue');
+      const before = store.figures()?.dry.elapsed_minutes ?? 0;
+      await type('Humidity', '80');
+      expect(store.settings()?.shop.humidity_percent).toBe(80);
+      expect(store.figures()?.dry.elapsed_minutes).toBeGreaterThan(before);
+      // Wood at 20 °C and 80 % rests at 16.0 % (Wood Handbook, Table 4-2), far from the 8 to 9 % of a dry room.
+      expect(element.textContent).toContain('points apart');
+    });
+
+    it('says once, beside the air, where nothing dries', async () => {
+      const { element, type } = await open(DryPage);
+      await type('Humidity', '96');
+      const told = [...element.querySelectorAll('.refuse')].map((line) => line.textContent ?? '');
+      expect(told.filter((text) => text.includes('nothing dries soundly'))).toHaveLength(1);
+    });
+
+    it('shows the bench the air and no entry', async () => {
+      const { element } = await open(DryPage, ['bench']);
+      expect(element.querySelector('app-air-form input')).toBeNull();
+      expect(element.querySelector('app-joint-movement')).toBeNull();
+      expect(element.querySelector('app-air-form')?.textContent?.replace(/\u00a0/g, ' ')).toContain('20 °C');
+    });
+  });
+});
