@@ -13,7 +13,7 @@ import { changesSchema } from '#shared/estimates/change-schema';
 import { problemSchema } from '#shared/problems/problem-schema';
 import { startCard } from '#shared/rate-cards/start-card';
 import { ProblemError } from '../app/core/problems/problem-error';
-import type { Conflict, Side } from '../app/estimates/draft/stale-choice';
+import type { Conflict, Side } from '../app/estimates/draft/conflict';
 import { STALE_CHOICE } from '../app/estimates/draft/stale-choice';
 import { EstimateClient } from '../app/estimates/estimate-client';
 import { FIGURES_REPORT } from '../app/estimates/figures/figures-report';

@@ -6,7 +6,7 @@ import { EstimateServer, ids, refusal, workspaceOn } from '../../test/estimate-s
 import { signIn, words } from '../../test/sign-in';
 import { Notices } from '../core/problems/notices';
 import { Saving } from '../core/saving/saving';
-import type { Conflict, Side } from './draft/stale-choice';
+import type { Conflict, Side } from './draft/conflict';
 import { EstimateStore } from './estimate-store';
 import { MemberActions } from './members/member-actions';
 

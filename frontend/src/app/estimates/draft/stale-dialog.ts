@@ -11,7 +11,7 @@ import {
 import { firstValueFrom } from 'rxjs';
 import { Formats } from '../../core/formats/formats';
 import { sideDifferences } from './side-differences';
-import type { Conflict, Side } from './stale-choice';
+import type { Conflict, Side } from './conflict';
 
 /** Two people changed one thing: both sides beside each other, and which is to stand. */
 @Component({
