@@ -154,5 +154,6 @@ function work(on: StepOnZone, card: BuildUpCard): Worked {
 /** Hands-on hours of one step on one zone, low, likely and high, set-up left out. House values throughout. */
 export function stepHours(on: StepOnZone, card: BuildUpCard): StepHours {
   const { id, kind, name, gradeId } = on.step;
-  return { stepId: id, kind, name, gradeId, coats: on.coats, ...work(on, card) };
+  const { pattern, hours, perLaid_hours, reasons } = work(on, card);
+  return { stepId: id, kind, name, gradeId, coats: on.coats, pattern, hours, perLaid_hours, reasons };
 }

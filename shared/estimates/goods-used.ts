@@ -18,9 +18,10 @@ interface MaterialShare extends GoodsShare {
 
 function materialShares({ materials, handsOn, memberId }: WorkedZone): MaterialShare[] {
   const kinds = new Map(handsOn.steps.map((step) => [step.stepId, stepWorkKind[step.kind]]));
-  return materials.needs.map(({ materialId, stepId, quantity }) => ({
-    ...{ materialId, memberId, kind: kinds.get(stepId) ?? 'ground', weight: quantity },
-  }));
+  return materials.needs.map(({ materialId, stepId, quantity }) => {
+    const kind = kinds.get(stepId) ?? 'ground';
+    return { materialId, memberId, kind, weight: quantity };
+  });
 }
 
 const shareOnly = ({ memberId, kind, weight }: GoodsShare): GoodsShare => ({ memberId, kind, weight });

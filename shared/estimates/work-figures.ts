@@ -1,6 +1,7 @@
 import { groundThickness } from '#shared/buildups/ground-thickness';
 import { recipeBatches } from '#shared/buildups/recipe-batches';
 import { sectionStrip } from '#shared/buildups/section-strip';
+import type { StepHours } from '#shared/buildups/step-hours';
 import type { UseHours } from '#shared/carving/carving-result';
 import { rowsTogether } from '#shared/carving/hours-rows';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
@@ -73,6 +74,10 @@ function zoneLeafFigures({ leaf }: WorkedZone, card: RateCard): ZoneLeafFigures 
   };
 }
 
+function stepFigures({ stepId, kind, name, gradeId, coats, hours, reasons }: StepHours): ZoneFigures['steps'][number] {
+  return { stepId, kind, name, gradeId, coats, hours, reasons };
+}
+
 function zoneFigures(worked: WorkedZone, card: RateCard): ZoneFigures {
   const { zone, area, buildUp, facts } = worked;
   const metal = card.leaf.products.find((product) => product.id === zone.leafId)?.metal ?? null;
@@ -85,9 +90,7 @@ function zoneFigures(worked: WorkedZone, card: RateCard): ZoneFigures {
     true_mm2: area.net_mm2,
     ground_mm: buildUp ? groundThickness(buildUp, facts, card.buildUps).thickness_mm : 0,
     hours: worked.handsOn.hours,
-    steps: worked.handsOn.steps.map(({ stepId, kind, name, gradeId, coats, hours, reasons }) => ({
-      ...{ stepId, kind, name, gradeId, coats, hours, reasons },
-    })),
+    steps: worked.handsOn.steps.map(stepFigures),
     layers: buildUp ? sectionStrip(buildUp, facts, metal) : [],
     leaf: zoneLeafFigures(worked, card),
     reasons: area.reasons,

@@ -35,20 +35,25 @@ export interface ZoneAt {
   readonly recutting_hours: number;
 }
 
-const factsWithoutLaying = (zone: MeasuredZone, at: ZoneAt, product: LeafProduct | undefined): ZoneFacts => ({
-  id: zone.zone.id,
+interface Laid {
+  readonly product: LeafProduct | undefined;
+  readonly laying: ZoneFacts['laying'];
+}
+
+const factsOf = ({ zone, area, finish }: MeasuredZone, at: ZoneAt, { product, laying }: Laid): ZoneFacts => ({
+  id: zone.id,
   pieceId: at.measured.member.pieceId,
-  buildUpId: zone.zone.buildUpId,
-  plan_mm2: zone.area.plan_mm2,
-  true_mm2: zone.area.net_mm2,
-  finish: zone.finish,
-  recutting: zone.zone.recutting,
+  buildUpId: zone.buildUpId,
+  plan_mm2: area.plan_mm2,
+  true_mm2: area.net_mm2,
+  finish,
+  recutting: zone.recutting,
   recutting_hours: at.recutting_hours,
-  laying: null,
-  paintedOrnament_mm2: (zone.area.plan_mm2 * zone.zone.painted_percent) / 100,
-  protectedEdge_mm: zone.zone.protectedEdge_mm * at.measured.member.count,
-  burnished_percent: zone.zone.burnished_percent,
-  chosenStepIds: zone.zone.chosenStepIds,
+  laying,
+  paintedOrnament_mm2: (area.plan_mm2 * zone.painted_percent) / 100,
+  protectedEdge_mm: zone.protectedEdge_mm * at.measured.member.count,
+  burnished_percent: zone.burnished_percent,
+  chosenStepIds: zone.chosenStepIds,
   needsSeal: product !== undefined && needsSeal(product),
   isRestoration: at.settings.restoration,
   isOutdoorsOrWet: at.settings.place !== 'indoors',
@@ -61,7 +66,7 @@ function pieceCost(
   { product, card }: { product: LeafProduct; card: RateCard },
 ): number {
   const laying = { way: 'lays' as const, form: product.form, counts: { first: 0, faulting: 0, second: 0 } };
-  const minutes = minutesPerLaid({ ...facts, laying }, buildUp.system, card.buildUps.laying);
+  const minutes = minutesPerLaid({ finish: facts.finish, laying }, buildUp.system, card.buildUps.laying);
   const gradeId = buildUp.steps.find((step) => step.kind === 'lay')?.gradeId;
   const grade = card.money.grades.find((known) => known.id === gradeId);
   return (minutes / 60) * Number(grade?.costPerHour ?? 0);
@@ -112,9 +117,9 @@ function missingFindings(zone: MeasuredZone, at: ZoneAt, buildUp: BuildUp | unde
 export function workedZone(zone: MeasuredZone, at: ZoneAt): WorkedZone {
   const buildUp = at.card.buildUps.buildUps.find((known) => known.id === zone.zone.buildUpId);
   const product = at.card.leaf.products.find((known) => known.id === zone.zone.leafId);
-  const plain = factsWithoutLaying(zone, at, product);
+  const plain = factsOf(zone, at, { product, laying: null });
   const leaf = buildUp && product ? leafOf(zone, at, { buildUp, facts: plain, product }) : null;
-  const facts = leaf && product ? { ...plain, laying: layingOf(leaf, product) } : plain;
+  const facts = leaf && product ? factsOf(zone, at, { product, laying: layingOf(leaf, product) }) : plain;
   const handsOn = zoneHandsOn(facts, at.card.buildUps);
   const materials = buildUp ? zoneMaterials(buildUp, facts, at.card.buildUps) : { needs: [], findings: [] };
   const own = buildUp ? zoneFindings(buildUp, facts, at.card.buildUps) : [];
@@ -125,6 +130,8 @@ export function workedZone(zone: MeasuredZone, at: ZoneAt): WorkedZone {
     ...materials.findings,
     ...own,
   ];
-  const { id, pieceId } = at.measured.member;
-  return { ...zone, memberId: id, pieceId, buildUp: buildUp ?? null, facts, leaf, handsOn, materials, findings };
+  const { id: memberId, pieceId } = at.measured.member;
+  const { zone: entry, area, finish } = zone;
+  const whole = buildUp ?? null;
+  return { zone: entry, area, finish, memberId, pieceId, buildUp: whole, facts, leaf, handsOn, materials, findings };
 }

@@ -52,19 +52,24 @@ function counted(input: ZoneLeafInput, product: LeafProduct, card: LeafCard): Zo
   const netLeaves = (laying?.leaves ?? 0) * kept * input.reliefFactor;
   const losses = zoneLosses(way, input.ground.finish, card);
   const grossLeaves = grossTriple(netLeaves, losses);
-  const { zoneId, productId, ground } = input;
+  const each = handledPerLeaf(laying, product);
   const worked = {
-    ...{ zoneId, productId, ground, way, laying, planArea_mm2, netLeaves, losses, grossLeaves },
+    zoneId: input.zoneId,
+    productId: input.productId,
+    ground: input.ground,
+    way,
+    laying,
+    planArea_mm2,
     trueArea_mm2: planArea_mm2 * input.reliefFactor,
+    netLeaves,
+    losses,
+    grossLeaves,
     grossLeaves_p10: grossPercentile(netLeaves, losses, 0.1),
     grossLeaves_p90: grossPercentile(netLeaves, losses, 0.9),
-    handled: mapTriple(grossLeaves, (leaves) => leaves * handledPerLeaf(laying, product)),
-  };
-  return {
-    ...worked,
-    reasons: zoneLeafReasons(input, worked),
+    handled: mapTriple(grossLeaves, (leaves) => leaves * each),
     findings: [...findings, ...partFindings(input), ...leafFindings(input, product, way)],
   };
+  return Object.assign(worked, { reasons: zoneLeafReasons(input, worked) });
 }
 
 /**

@@ -14,6 +14,13 @@ const minor = (code: WordCode, figure: D | number, values: WordValues = {}): Rea
   unit: 'minor',
 });
 
+/** A figure that follows from a house value. */
+const fromHouse = (
+  code: WordCode,
+  figure: D | number,
+  { values, house }: Required<Pick<Reason, 'values' | 'house'>>,
+): Reason => ({ code, values, figure: Number(figure), unit: 'minor', house });
+
 const codeOfHead: Readonly<Record<CostHead, WordCode>> = {
   labour: 'cost-labour',
   leaf: 'cost-leaf',
@@ -27,7 +34,7 @@ const codeOfHead: Readonly<Record<CostHead, WordCode>> = {
 function itemReason(item: CostItem, { rates }: Pricing): Reason {
   if (item.head === 'consumables') {
     const values = { share_percent: rates.consumables_percent.toNumber() };
-    return { ...minor('cost-consumables', item.cost, values), house: 'consumables_percent' };
+    return fromHouse('cost-consumables', item.cost, { values, house: 'consumables_percent' });
   }
   if (item.head !== 'labour') return minor(codeOfHead[item.head], item.cost, { item: item.name });
   const values = {
@@ -35,7 +42,7 @@ function itemReason(item: CostItem, { rates }: Pricing): Reason {
     worked_hours: item.hours.toNumber(),
     rate_minor: rates.grades.get(item.itemId ?? '')?.perHour.toNumber() ?? 0,
   };
-  return { ...minor('cost-labour', item.cost, values), house: item.name };
+  return fromHouse('cost-labour', item.cost, { values, house: item.name });
 }
 
 /** How overhead arises on so many hours or so much labour cost (unrounded minor units). */
@@ -47,24 +54,24 @@ export function overheadReason(
   const rate = rates.overhead.rate.toNumber();
   if (rates.overhead.way === 'per-hour') {
     const values = { worked_hours: Number(on.hours), rate_minor: rate };
-    return { ...minor('cost-overhead-hours', overhead, values), house: 'overhead' };
+    return fromHouse('cost-overhead-hours', overhead, { values, house: 'overhead' });
   }
   const values = { share_percent: rate, labour_minor: Number(on.labour) };
-  return { ...minor('cost-overhead-share', overhead, values), house: 'overhead' };
+  return fromHouse('cost-overhead-share', overhead, { values, house: 'overhead' });
 }
 
 /** How contingency arises on a direct cost (unrounded minor units). */
 export function contingencyReason(contingency: D | number, direct: D | number, input: PriceInput): Reason {
   if (input.contingency.way === 'risk') return minor('cost-contingency-risk', contingency);
   const values = { share_percent: Number(input.contingency.percent), direct_minor: Number(direct) };
-  return { ...minor('cost-contingency-share', contingency, values), house: 'contingency' };
+  return fromHouse('cost-contingency-share', contingency, { values, house: 'contingency' });
 }
 
 /** How a price arises from a cost (unrounded minor units). */
 export function profitReason(price: D | number, cost: D | number, { profit }: PriceInput): Reason {
   const values = { share_percent: Number(profit.percent), cost_minor: Number(cost) };
   const code = profit.way === 'margin' ? 'price-by-margin' : 'price-by-mark-up';
-  return { ...minor(code, price, values), house: 'profit' };
+  return fromHouse(code, price, { values, house: 'profit' });
 }
 
 /** How the price of one line came about, step by step; figures in minor units, not yet rounded but for the last. */
