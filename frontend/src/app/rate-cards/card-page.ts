@@ -89,6 +89,11 @@ export class CardPage {
     else this.store.undo();
   }
 
+  /** On a phone the parts go past the edge of the screen; the open one comes into view. */
+  protected show(isOpen: boolean, link: HTMLElement): void {
+    if (isOpen) link.scrollIntoView?.({ block: 'nearest', inline: 'center' });
+  }
+
   protected async copy(): Promise<void> {
     if (await this.saving.flush()) await this.startCopy.of(this.cardId());
   }

@@ -38,6 +38,8 @@ export class CardEntry {
     const unread = this.store.remarks().textOf(this.path());
     return unread ?? (content ? this.writing.text(this.cell(), content) : '');
   });
+  /** What stands there for those who only read it. */
+  protected readonly known = computed(() => [this.text(), this.text() ? this.unit() : ''].filter(Boolean).join(' '));
   protected readonly choices = computed(() => {
     const content = this.store.content();
     const choices = content && this.writing.choices(this.cell(), content);

@@ -88,6 +88,8 @@ export class CardList {
   });
   readonly chosen = computed(() => this.rows().find(({ id }) => id === this.chosenId()));
   protected readonly complaints = computed(() => this.store.remarks().ofList(this.list()));
+  /** Choosing a row is for something: to move it about, or to see what stands in it. */
+  protected readonly isChoosing = computed(() => this.isEditable() || this.flat() || this.inner().length > 0);
   /** The lists that stand in each row, for the chosen one. */
   protected readonly inner = computed(() => {
     const chosen = this.chosen();
