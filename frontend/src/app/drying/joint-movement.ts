@@ -9,7 +9,7 @@ import { EntryAt, type EntryChoice } from '../ui/field/entry-at';
 import type { Explained } from '../ui/figure/explained';
 import { Figure } from '../ui/figure/figure';
 import { FindingList } from '../ui/page/finding-list';
-import { type Joint, jointSchema } from './joint-schema';
+import { type Joint, jointSchema } from '#shared/drying/joint-schema';
 
 const cuts: readonly EntryChoice[] = [
   { value: 'tangential', label: $localize`along the rings (flat sawn)` },

@@ -50,11 +50,13 @@ async function open<Page>(page: Type<Page>, roles: readonly Role[] = ['estimator
   await jest.advanceTimersByTimeAsync(1);
   const fixture = TestBed.createComponent(page);
   const element = fixture.nativeElement as HTMLElement;
+  const turn = async () => {
+    await jest.advanceTimersByTimeAsync(1);
+    fixture.detectChanges();
+  };
   const settle = async () => {
-    for (const _round of [1, 2]) {
-      await jest.advanceTimersByTimeAsync(1);
-      fixture.detectChanges();
-    }
+    await turn();
+    await turn();
   };
   await settle();
   const rows = () =>
