@@ -48,5 +48,6 @@ module.exports = {
     node('test/reference'),
     node('test/start'),
     ...['api', 'repositories'].map((folder) => onDatabase(`test/${folder}`)),
+    { ...onDatabase('test/journeys'), globalSetup: '<rootDir>/test/journeys/built-pages.mjs' },
   ],
 };

@@ -1,0 +1,95 @@
+import { mkdirSync } from 'node:fs';
+import { createServer, type Server } from 'node:http';
+import type { AddressInfo } from 'node:net';
+import { join } from 'node:path';
+import { chromium, type Browser, type BrowserContext, type Page } from 'playwright-core';
+import { startApi, type Api } from '../api/start-api';
+import { password } from '../api/test-workshop';
+
+const root = join(__dirname, '../..');
+const pictures = join(__dirname, 'screenshots');
+
+/** What keeps Chromium to itself: it asks nobody but us. */
+const quiet = [
+  '--no-sandbox',
+  '--disable-gpu',
+  '--disable-quic',
+  '--no-first-run',
+  '--disable-background-networking',
+  '--disable-component-update',
+  '--disable-sync',
+];
+
+/** How somebody looks at the pages. */
+export interface Screen {
+  readonly width: number;
+  readonly height: number;
+  readonly dark?: boolean;
+}
+
+export const desk: Screen = { width: 1440, height: 900 };
+export const phone: Screen = { width: 360, height: 780 };
+
+/** Somebody at a browser of their own. `complaints` gathers what the browser objected to. */
+export interface Person {
+  readonly page: Page;
+  readonly context: BrowserContext;
+  readonly complaints: string[];
+  /** Keeps a picture of what they see. */
+  see(name: string): Promise<void>;
+}
+
+/** The application on loopback with its built pages, and browsers to walk through it. */
+export class Walk {
+  private constructor(
+    readonly api: Api,
+    readonly address: string,
+    private readonly server: Server,
+    private readonly browser: Browser,
+  ) {}
+
+  static async begin(): Promise<Walk> {
+    const api = await startApi({ WEB_DIR: join(root, 'dist/web') });
+    const server = createServer(api.app.web.express);
+    await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
+    const browser = await chromium.launch({ executablePath: '/usr/bin/chromium', args: quiet });
+    mkdirSync(pictures, { recursive: true });
+    return new Walk(api, `http://127.0.0.1:${(server.address() as AddressInfo).port}`, server, browser);
+  }
+
+  async end(): Promise<void> {
+    await this.browser.close();
+    await new Promise<void>((resolve) => {
+      this.server.close(() => resolve());
+      this.server.closeAllConnections();
+    });
+    await this.api.stop();
+  }
+
+  /** Somebody who was never here. */
+  async stranger({ width, height, dark = false }: Screen = desk): Promise<Person> {
+    const context = await this.browser.newContext({
+      viewport: { width, height },
+      colorScheme: dark ? 'dark' : 'light',
+      reducedMotion: 'reduce',
+    });
+    const page = await context.newPage();
+    page.setDefaultTimeout(30_000);
+    const complaints: string[] = [];
+    page.on('console', (message) => void (message.type() === 'error' && complaints.push(message.text())));
+    page.on('pageerror', (error) => complaints.push(error.message));
+    const see = async (name: string) => void (await page.screenshot({ path: join(pictures, `${name}.png`) }));
+    return { page, context, complaints, see };
+  }
+
+  /** Somebody of our workshop, signed in by hand. */
+  async as(role: 'owner' | 'estimator' | 'office' | 'bench', screen: Screen = desk): Promise<Person> {
+    const person = await this.stranger(screen);
+    await person.page.goto(`${this.address}/sign-in`);
+    await person.page.getByLabel('E-mail address').fill(this.api.ours.people[role].email);
+    await person.page.getByRole('textbox', { name: 'Password' }).fill(password);
+    await person.page.getByRole('button', { name: 'Sign in' }).click();
+    await person.page.waitForURL((url) => !url.pathname.startsWith('/sign-in'));
+    return person;
+  }
+}
