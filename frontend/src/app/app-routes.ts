@@ -18,6 +18,11 @@ export const appRoutes: Routes = [
         path: 'jobs/:jobId/estimates',
         loadChildren: () => import('./estimates/estimates-routes').then(({ estimatesRoutes }) => estimatesRoutes),
       },
+      {
+        path: 'rates',
+        canMatch: [roleGuard('owner', 'estimator')],
+        loadChildren: () => import('./rate-cards/rate-cards-routes').then(({ rateCardsRoutes }) => rateCardsRoutes),
+      },
       { path: 'jobs', loadChildren: () => import('./jobs/jobs-routes').then(({ jobsRoutes }) => jobsRoutes) },
       {
         path: 'clients',
