@@ -1,12 +1,11 @@
 import { areaShare } from '#shared/buildups/area-share';
-import { batchRecipe } from '#shared/buildups/batch-recipe';
+import { partVolume_litres, partsTogether } from '#shared/buildups/batch-recipe';
 import type { BuildUp, BuildUpStep, MaterialUse } from '#shared/buildups/buildup';
 import type { BuildUpCard, Material } from '#shared/buildups/buildup-card';
 import { coatsOf } from '#shared/buildups/coats-of';
 import { stepsDone } from '#shared/buildups/steps-done';
 import type { ZoneFacts } from '#shared/buildups/zone-facts';
 import type { Finding } from '#shared/words/finding';
-import type { Reason } from '#shared/words/reason';
 
 /** How much of a material one step takes on one zone, in the material's own unit, loss included. */
 export interface MaterialNeed {
@@ -14,7 +13,6 @@ export interface MaterialNeed {
   readonly stepId: string;
   readonly zoneId: string;
   readonly quantity: number;
-  readonly reason: Reason;
 }
 
 /** What a zone takes of materials; `findings` name what the card does not hold. */
@@ -37,10 +35,14 @@ interface Taken {
   readonly volume_litres?: number;
 }
 
-const missing = (on: UseOnZone, code: Finding['code'], values: Finding['values']): ZoneMaterials => ({
-  needs: [],
-  findings: [{ kind: 'missing', code, values: { step: on.step.name, ...values }, about: on.facts.id }],
-});
+/** What a zone takes, as it is gathered step by step. */
+interface Gathered {
+  readonly needs: MaterialNeed[];
+  readonly findings: Finding[];
+}
+
+const miss = (into: Gathered, on: UseOnZone, { code, values }: Pick<Finding, 'code' | 'values'>): void =>
+  void into.findings.push({ kind: 'missing', code, values: { step: on.step.name, ...values }, about: on.facts.id });
 
 const servedArea_mm2 = ({ step, facts, card }: UseOnZone): number => facts.true_mm2 * areaShare(step, facts, card);
 
@@ -61,50 +63,36 @@ function inUnit(material: Material, { mass_kg, volume_litres }: Taken): number |
   return material.unit === 'kg' ? (volume_litres ?? 0) * material.bulk_kg_L : (mass_kg ?? 0) / material.bulk_kg_L;
 }
 
-function need(on: UseOnZone, part: Taken): ZoneMaterials {
-  const material = on.card.materials.find((known) => known.id === part.materialId);
-  if (!material) return missing(on, 'buildup-material-unknown', { material: part.materialId });
-  const quantity = inUnit(material, part);
-  if (quantity === null) return missing(on, 'buildup-bulk-unknown', { material: material.name });
-  const values = {
-    step: on.step.name,
-    area_mm2: servedArea_mm2(on),
-    coats: coatsOf(on.step, on.facts) * on.use.share,
-    loss_percent: on.use.loss_percent,
-    need: quantity,
-    unit: material.unit,
-    material: material.name,
-  };
-  const reason: Reason = {
-    code: 'buildup-material-used',
-    values,
-    figure: quantity,
-    unit: 'number',
-    house: on.step.name,
-  };
-  return {
-    needs: [{ materialId: material.id, stepId: on.step.id, zoneId: on.facts.id, quantity, reason }],
-    findings: [],
-  };
+function addNeed(into: Gathered, on: UseOnZone, taken: Taken): void {
+  const material = on.card.materials.find((known) => known.id === taken.materialId);
+  if (!material) return miss(into, on, { code: 'buildup-material-unknown', values: { material: taken.materialId } });
+  const quantity = inUnit(material, taken);
+  if (quantity === null) return miss(into, on, { code: 'buildup-bulk-unknown', values: { material: material.name } });
+  into.needs.push({ materialId: material.id, stepId: on.step.id, zoneId: on.facts.id, quantity });
 }
 
-function needsOfUse(on: UseOnZone): ZoneMaterials[] {
-  const { use, card } = on;
+/** A recipe is taken apart into what is bought. */
+function addRecipe(into: Gathered, on: UseOnZone, amount_litres: number): void {
+  const recipe = on.card.recipes.find((known) => known.id === on.use.itemId);
+  if (!recipe) return miss(into, on, { code: 'buildup-recipe-unknown', values: { recipe: on.use.itemId } });
+  const together = partsTogether(recipe);
+  for (const { materialId, parts } of recipe.parts)
+    if (materialId !== null)
+      addNeed(into, on, { materialId, volume_litres: partVolume_litres(parts, together, amount_litres) });
+}
+
+function addUse(into: Gathered, on: UseOnZone): void {
   const amount = amountTaken(on);
-  if (use.of === 'material')
-    return [need(on, { materialId: use.itemId, [use.way === 'grams' ? 'mass_kg' : 'volume_litres']: amount })];
-  const recipe = card.recipes.find((known) => known.id === use.itemId);
-  if (!recipe) return [missing(on, 'buildup-recipe-unknown', { recipe: use.itemId })];
-  return batchRecipe(recipe, amount).flatMap(({ materialId, volume_litres }) =>
-    materialId === null ? [] : [need(on, { materialId, volume_litres })],
-  );
+  const { of, way, itemId: materialId } = on.use;
+  if (of === 'recipe') addRecipe(into, on, amount);
+  else addNeed(into, on, way === 'grams' ? { materialId, mass_kg: amount } : { materialId, volume_litres: amount });
 }
 
 /** Materials of one zone by step, from its true area in mm², coats, consumption and loss; recipes are taken apart into what is bought. */
 export function zoneMaterials(buildUp: BuildUp, facts: ZoneFacts, card: BuildUpCard): ZoneMaterials {
   if (!(facts.true_mm2 >= 0)) throw new RangeError('an area is never negative');
-  const all = stepsDone(buildUp, facts).flatMap((step) =>
-    step.uses.flatMap((use) => needsOfUse({ use, step, facts, card })),
-  );
-  return { needs: all.flatMap((one) => one.needs), findings: all.flatMap((one) => one.findings) };
+  const gathered: Gathered = { needs: [], findings: [] };
+  for (const step of stepsDone(buildUp, facts))
+    for (const use of step.uses) addUse(gathered, { use, step, facts, card });
+  return gathered;
 }

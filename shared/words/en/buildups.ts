@@ -23,13 +23,12 @@ export const buildups = {
   'buildup-material-unknown': '{step} asks for material {material}, which the rate card does not hold.',
   'buildup-bulk-unknown':
     '{material} is mixed by volume and bought by weight, but the rate card does not say what a litre of it weighs.',
-  'buildup-material-used':
-    '{step}: {area_mm2} of true surface × {coats, plural, one {# coat} other {# coats}}, loss {loss_percent}, takes {need, number} {unit} of {material}.',
   'buildup-material-bought':
     '{material}: {need, number} {unit} needed, {bought, number} {unit} bought in {packs, plural, one {# pack} other {# packs}}.',
   'buildup-material-pro-rata': '{material}: {need, number} {unit} charged as it is used.',
   'buildup-material-no-pack': '{material} has no packs in the rate card, so it is charged as it is used.',
-  'buildup-batch-part': '{part}: {parts, plural, one {# part} other {# parts}} of {total, number} in a batch of {batch_litres}.',
+  'buildup-batch-part':
+    '{part}: {parts, plural, one {# part} other {# parts}} of {total, number} in a batch of {batch_litres}.',
   'buildup-one-batch':
     'Make one batch of size for the whole ground of a piece: two batches are never of quite one strength.',
   'buildup-water-outdoors':
