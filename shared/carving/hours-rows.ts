@@ -16,6 +16,13 @@ export const rowsTogether = (rows: readonly CarvingHoursRow[]): CarvingHoursRow[
 export const gradesTogether = (rows: readonly GradeHours[]): GradeHours[] =>
   together(rows, (row) => row.gradeId).map(({ gradeId, hours }) => ({ gradeId, hours }));
 
+/** Likely hours of each grade over the given rows. */
+export function likelyByGrade(rows: readonly GradeHours[]): Map<string, number> {
+  const grades = new Map<string, number>();
+  for (const { gradeId, hours } of rows) grades.set(gradeId, (grades.get(gradeId) ?? 0) + hours.likely);
+  return grades;
+}
+
 /** Hours of the rows of the given kinds. */
 export const hoursOfKinds = (rows: readonly CarvingHoursRow[], kinds: readonly CarvingWorkKind[]): Triple =>
   tripleSum(rows.filter((row) => kinds.includes(row.kind)).map((row) => row.hours));

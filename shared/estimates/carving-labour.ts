@@ -1,5 +1,5 @@
 import type { CarvingHoursRow, CarvingResult, UseHours } from '#shared/carving/carving-result';
-import { ornamentCarving, sharpeningRows } from '#shared/carving/hours-rows';
+import { likelyByGrade, ornamentCarving, sharpeningRows } from '#shared/carving/hours-rows';
 import { patternRows } from '#shared/carving/pattern-hours';
 import { recutRowsOfUse, type RecutZones } from '#shared/carving/recut-hours';
 import type { PriceLabour } from '#shared/estimates/price/price-input';
@@ -10,7 +10,7 @@ import { groupedBy } from '#shared/units/grouped-by';
 export type MemberOf = (id: string) => string | null;
 
 const labourOf = (rows: readonly CarvingHoursRow[], memberId: string | null): PriceLabour[] =>
-  rows.map((row) => ({ memberId, kind: 'carving', gradeId: row.gradeId, hours: row.hours.likely }));
+  [...likelyByGrade(rows)].map(([gradeId, hours]) => ({ memberId, kind: 'carving', gradeId, hours }));
 
 interface CarvedBy {
   readonly result: CarvingResult;

@@ -143,7 +143,7 @@ const few = { numRuns: 60 };
 
 /** Every length of a shape twice as long, every area four times as large. */
 function doubled<T>(value: T, key = ''): T {
-  if (Array.isArray(value)) return value.map((inner) => doubled(inner, key)) as T;
+  if (Array.isArray(value)) return value.map((inner: unknown) => doubled(inner, key)) as T;
   if (typeof value === 'number')
     return (key.endsWith('_mm2') ? value * 4 : key.endsWith('_mm') ? value * 2 : value) as T;
   if (typeof value !== 'object' || value === null) return value;

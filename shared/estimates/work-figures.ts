@@ -114,11 +114,11 @@ function membersFigures(work: EstimateWork, memberOf: MemberOfUse, card: RateCar
 
 function useFigures({ carving: { uses } }: EstimateWork, memberOf: MemberOfUse, card: RateCard): UseFigures[] {
   const names = new Map([...card.carving.items, ...card.carving.ornaments].map(({ id, name }) => [id, name]));
-  return uses.map(({ useId, ornamentId, quantity, fit, factor, carving, reasons }) => ({
-    ...{ useId, quantity, fit, factor, carving, reasons },
-    memberId: memberOf.get(useId) ?? '',
-    ornament: names.get(ornamentId) ?? ornamentId,
-  }));
+  return uses.map(({ useId, ornamentId, quantity, fit, factor, carving, reasons }) => {
+    const memberId = memberOf.get(useId) ?? '';
+    const ornament = names.get(ornamentId) ?? ornamentId;
+    return { useId, quantity, fit, factor, carving, reasons, memberId, ornament };
+  });
 }
 
 function carvingFigures({ carving }: EstimateWork, card: RateCard): CarvingFigures {
