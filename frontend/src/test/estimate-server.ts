@@ -105,7 +105,12 @@ export const refusal = (status: number, more: object = {}): ProblemError =>
 export class EstimateServer implements Pick<EstimateClient, 'read' | 'change' | 'card' | 'job' | 'issues'> {
   pieces: Row<PieceContent>[] = [{ id: ids.piece, version: 1, content: { name: 'Base', place: 0, note: '' } }];
   members: Row<MemberContent>[] = [...startMembers];
-  settings: EstimateSettings = startSettings(startCard, { title: 'Base', seed: 7, restoration: false, stageIds: [] });
+  settings: EstimateSettings = startSettings(startCard, {
+    title: 'Base',
+    seed: 7,
+    restoration: false,
+    stageIds: [id(16), id(17), id(18)],
+  });
   settingsVersion = 1;
   version = 1;
   /** Every list of changes that arrived. */

@@ -8,7 +8,7 @@ import type { Part } from './part';
   imports: [RouterLink],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <h3>{{ heading() }}</h3>
+    <h2>{{ heading() }}</h2>
     <ul class="plain">
       @for (part of parts(); track part.key) {
         <li [class.chosen]="part.key === open()">

@@ -27,6 +27,7 @@ import { EstimateStore } from '../estimate-store';
     <aside class="beside" [attr.aria-label]="besideLabel()">
       <ng-content select="[above]" />
       @if (!unexplained()) {
+        <h3 class="visually-hidden" i18n>Reasons</h3>
         <app-reason-panel (houseChosen)="openCard($event)" />
       }
       <ng-content select="[beside]" />

@@ -57,6 +57,8 @@ export class PricePage {
   protected readonly heading = computed(() => this.parts.parts().find(({ key }) => key === this.open())?.name ?? '');
   protected readonly memberNames = computed(() => new Map(this.store.members().map(({ id, name }) => [id, name])));
   protected readonly presentation = computed(() => this.store.settings()?.presentation ?? 'members');
+  /** The cost side, for those who may see it. */
+  protected readonly cost = computed(() => this.store.costed()?.cost.price);
   protected readonly findings = computed(() => this.store.costed()?.cost.findings ?? []);
   /** Names of the alternatives the figures are shown with. */
   protected readonly choice = computed(() => {
@@ -70,7 +72,7 @@ export class PricePage {
   });
   /** What the place is about: what is left of the price, or for the office how it adds up. */
   private readonly about = computed<Explained | undefined>(() => {
-    const [priced, cost] = [this.store.priced(), this.store.costed()?.cost.price];
+    const [priced, cost] = [this.store.priced(), this.cost()];
     if (cost) return profitExplained(this.formats, cost);
     return (
       priced && { id: 'sum net', heading: this.formats.money(priced.price.net_minor), reasons: priced.price.reasons }

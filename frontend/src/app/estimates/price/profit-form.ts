@@ -16,7 +16,7 @@ import {
   profitSaidAs,
   profitSettingsOf,
   type ProfitEntries,
-} from './profit-entries';
+} from './profit-form-schema';
 import { ProfitFigures } from './profit-figures';
 import { RiskTable } from './risk-table';
 

@@ -30,7 +30,11 @@ export interface ExtraStart {
 
 type Labour = Extract<ExtraLine, { kind: 'labour' }>;
 
-const bookletsCost = (price: DecimalText, booklets: number): DecimalText => new D(price).times(booklets).toFixed();
+/** What booklets cost, written with the decimals of their price. */
+function bookletsCost(price: DecimalText, booklets: number): DecimalText {
+  const decimals = price.split('.').at(1)?.length ?? 0;
+  return new D(price).times(booklets).toFixed(decimals);
+}
 
 /** Makes the lines of each usual thing, at the figures the rate card has for it. */
 class ExtraMaker {

@@ -1,0 +1,347 @@
+import { type ComponentFixture, TestBed } from '@angular/core/testing';
+import { provideHttpClient } from '@angular/common/http';
+import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
+import { ActivatedRoute, convertToParamMap, provideRouter } from '@angular/router';
+import { of } from 'rxjs';
+import type { Role } from '#shared/actor/role';
+import { EstimateServer, ids, workspaceOn } from '../../../test/estimate-server';
+import { signIn, words } from '../../../test/sign-in';
+import { SESSION_PORT } from '../../core/session/session-port';
+import { Saving } from '../../core/saving/saving';
+import { EstimateStore } from '../estimate-store';
+import { PricePage } from './price-page';
+
+describe('PricePage', () => {
+  let server: EstimateServer;
+  let store: EstimateStore;
+  let fixture: ComponentFixture<PricePage>;
+  let http: HttpTestingController;
+
+  const element = () => fixture.nativeElement as HTMLElement;
+  const settle = async (time_ms = 1) => {
+    await jest.advanceTimersByTimeAsync(time_ms);
+    fixture.detectChanges();
+    await jest.advanceTimersByTimeAsync(1);
+    fixture.detectChanges();
+  };
+  const spoken = (node: Element | null | undefined) => (node?.textContent ?? '').replace(/\s+/g, ' ').trim();
+  const parts = () => [...element().querySelectorAll('app-part-list .name')].map((part) => spoken(part));
+  const field = (label: string) =>
+    [...element().querySelectorAll('app-field')]
+      .find((one) => spoken(one.querySelector('label')).startsWith(label))
+      ?.querySelector<HTMLInputElement & HTMLSelectElement>('input, select, textarea') as HTMLInputElement;
+  const button = (text: string) =>
+    [...element().querySelectorAll('button')].find((one) => spoken(one) === text) as HTMLButtonElement;
+  const grid = () =>
+    [...element().querySelectorAll('.content tbody tr')].map((row) =>
+      [...row.querySelectorAll('td')].map((cell) => {
+        const copy = cell.cloneNode(true) as HTMLElement;
+        copy.querySelectorAll('.ghost').forEach((ghost) => ghost.remove());
+        return spoken(copy);
+      }),
+    );
+
+  async function type(label: string, text: string): Promise<void> {
+    field(label).value = text;
+    field(label).dispatchEvent(new Event('input'));
+    await settle();
+  }
+
+  async function choose(label: string, value: string): Promise<void> {
+    field(label).value = value;
+    field(label).dispatchEvent(new Event('change'));
+    await settle();
+  }
+
+  /** Types into the cell of a table as one does: select it, type, Enter. */
+  async function fill(row: number, column: number, text: string): Promise<void> {
+    const cell = () => element().querySelectorAll('.content tbody tr')[row].querySelectorAll('td')[column];
+    cell().dispatchEvent(new MouseEvent('dblclick', { bubbles: true }));
+    await settle();
+    const editor = cell().querySelector('input') as HTMLInputElement;
+    editor.value = text;
+    editor.dispatchEvent(new KeyboardEvent('keydown', { key: 'Enter', bubbles: true }));
+    await settle();
+  }
+
+  async function open(part?: string, roles: readonly Role[] = ['estimator']): Promise<void> {
+    TestBed.configureTestingModule({
+      providers: [
+        words,
+        provideRouter([]),
+        provideHttpClient(),
+        provideHttpClientTesting(),
+        { provide: SESSION_PORT, useValue: {} },
+        { provide: ActivatedRoute, useValue: { queryParamMap: of(convertToParamMap({})) } },
+        ...workspaceOn(server),
+      ],
+    });
+    signIn(roles);
+    http = TestBed.inject(HttpTestingController);
+    store = TestBed.inject(EstimateStore);
+    void store.open({ jobId: ids.job, estimateId: ids.estimate });
+    await jest.advanceTimersByTimeAsync(1);
+    fixture = TestBed.createComponent(PricePage);
+    fixture.componentRef.setInput('part', part);
+    await settle();
+  }
+
+  beforeEach(() => {
+    jest.useFakeTimers();
+    server = new EstimateServer();
+  });
+  afterEach(() => jest.useRealTimers());
+
+  describe('shows the lines', () => {
+    it('with their cost to whoever works the estimate, each price explained', async () => {
+      await open();
+      const headings = [...element().querySelectorAll('.content th')].map((heading) => spoken(heading));
+      expect(headings).toEqual(['Line', 'Hours', 'Direct', 'Overhead', 'Contingency', 'Cost', 'Price, €']);
+      expect(grid()[0][0]).toBe('Top edge');
+      element().querySelector<HTMLElement>('.content td app-figure button')?.click();
+      await settle();
+      expect(spoken(element().querySelector('app-reason-panel'))).toContain('with a margin of 18% of the price');
+    });
+
+    it('without a word of cost to the office, who cannot change them', async () => {
+      const whole = await server.read();
+      const { cost: _cost, ...figures } = whole.figures;
+      const { profit: _profit, contingency: _risk, extras: _extras, seed: _seed, ...settings } = whole.settings;
+      server.read = () => Promise.resolve({ ...whole, figures, settings } as unknown as typeof whole);
+      await open(undefined, ['office']);
+      expect(parts()).toEqual(['Lines', 'Stages of payment', 'Alternatives']);
+      expect(element().querySelectorAll('.content th')).toHaveLength(2);
+      expect(element().querySelector('app-money-bar')).toBeNull();
+      expect(element().querySelector<HTMLFieldSetElement>('app-presentation-choice fieldset')?.disabled).toBe(true);
+    });
+
+    it('by kind of work where that is chosen, which the paper follows', async () => {
+      await open();
+      const first = grid()[0][0];
+      element()
+        .querySelectorAll<HTMLInputElement>('app-presentation-choice input')[1]
+        .dispatchEvent(new Event('change'));
+      await settle(700);
+      expect(server.settings.presentation).toBe('kinds');
+      expect(grid()[0][0]).not.toBe(first);
+    });
+
+    it('with where the money goes in words and figures that are the net price together', async () => {
+      await open();
+      const rows = [...element().querySelectorAll('app-money-bar tbody tr:not(.about)')];
+      const amounts = rows.map((row) =>
+        Math.round(Number(spoken(row.querySelector('td')).replace(/[^\d.-]/g, '')) * 100),
+      );
+      expect(amounts.reduce((sum, amount) => sum + amount, 0)).toBe(store.priced()?.price.net_minor);
+      expect(element().querySelectorAll('app-money-bar rect')).toHaveLength(rows.length);
+    });
+  });
+
+  describe('takes profit', () => {
+    it('from the card until it is said otherwise, beginning with what the card has', async () => {
+      await open('profit');
+      expect(spoken(element().querySelector('app-profit-form option'))).toContain('margin of 18%');
+      await choose('Profit is', 'margin');
+      expect(field('Margin').value).toBe('18');
+      await type('Margin', '25');
+      await settle(700);
+      expect(server.settings.profit).toEqual({ way: 'margin', percent: '25' });
+      expect(spoken(element().querySelector('app-profit-figures'))).toContain('25.0033.33');
+    });
+
+    it('said the other way, the price staying where it was to the next cents', async () => {
+      server.settings = { ...server.settings, profit: { way: 'margin', percent: '20' } };
+      await open('profit');
+      const before_minor = store.priced()!.price.net_minor;
+      await choose('Profit is', 'mark-up');
+      expect([field('Mark-up').value, store.priced()!.price.net_minor]).toEqual(['25', before_minor]);
+    });
+
+    it('and warns where a discount takes the price below its cost', async () => {
+      await open('profit');
+      await choose('Discount', 'percent');
+      await type('Share taken off', '40');
+      expect(spoken(element().querySelector('app-finding-list'))).toContain('below cost');
+      await type('Share taken off', '1');
+      expect(element().querySelector('app-finding-list')).toBeNull();
+    });
+
+    it('sends nothing that cannot be read, keeps it while one looks elsewhere, and comes back to it', async () => {
+      await open('profit');
+      await choose('Profit is', 'margin');
+      await settle(700);
+      await type('Margin', '1O');
+      await settle(700);
+      expect(server.settings.profit).toEqual({ way: 'margin', percent: '18' });
+      expect(TestBed.inject(Saving).hasUnsent()).toBe(true);
+      fixture.componentRef.setInput('part', 'stages');
+      await settle();
+      fixture.componentRef.setInput('part', 'profit');
+      await settle();
+      expect(element().querySelector('app-profit-form [aria-invalid="true"]')).not.toBeNull();
+      await type('Margin', '20');
+      await settle(700);
+      expect(server.settings.profit?.percent).toBe('20');
+    });
+
+    it('and shows again what an undo brings back', async () => {
+      await open('profit');
+      await choose('Discount', 'amount');
+      await type('Amount taken off', '50');
+      await settle(2500);
+      await type('Amount taken off', '75');
+      store.undo();
+      await settle();
+      expect(field('Amount taken off').value).toBe('50');
+    });
+
+    it('marks the price as being worked out while risk is drawn for it', async () => {
+      await open('profit');
+      await choose('Contingency is', 'risk');
+      store.changeMember(ids.leg, { ...memberContent(ids.leg), count: 4 });
+      await settle();
+      expect(spoken(element().querySelector('app-risk-table [role="status"]'))).toContain('Being worked out');
+      await settle(900);
+      expect(spoken(element().querySelector('app-risk-table'))).toContain('seed 7');
+    });
+  });
+
+  describe('takes further lines', () => {
+    it('from the card with one press, at its figures, and takes them back', async () => {
+      await open('extras');
+      button('Packing and crate').click();
+      await settle();
+      expect(grid().map(([name, , quantity, unit, rate]) => [name, quantity, unit, rate])).toEqual([
+        ['Packing', '6', 'h', ''],
+        ['Crate', '', '', '180.00'],
+      ]);
+      store.undo();
+      await settle();
+      expect(store.settings()?.extras).toEqual([]);
+    });
+
+    it('typed in the table; what cannot be read stays with its remark and is not sent', async () => {
+      await open('extras');
+      button('Timber').click();
+      await settle();
+      await fill(0, 2, '25');
+      await fill(0, 4, '1,200');
+      expect(store.settings()?.extras?.[0]).toMatchObject({ volume_dm3: 25, price_per_dm3: '2.40' });
+      expect(grid()[0][4]).toContain('1,200');
+      expect(grid()[0][4]).toContain('thousands');
+      await fill(0, 4, '3.10');
+      await settle(700);
+      expect(server.settings.extras[0]).toMatchObject({ price_per_dm3: '3.1' });
+    });
+
+    it('entered in full in the form of the chosen line', async () => {
+      await open('extras');
+      button('Measured work').click();
+      await settle();
+      await type('Measuring rule', 'Girth, narrow members at 150 mm');
+      await choose('Belongs to', [...(field('Belongs to') as unknown as HTMLSelectElement).options][1].value);
+      await settle(700);
+      expect(server.settings.extras[0]).toMatchObject({
+        rule: 'Girth, narrow members at 150 mm',
+        memberId: ids.edge,
+      });
+    });
+  });
+
+  describe('takes stages', () => {
+    it('that come to 100 %, waiting with those that do not, and shows every payment to the cent', async () => {
+      await open('stages');
+      const before = server.settings.stages.parts;
+      await fill(1, 1, '30');
+      await settle(700);
+      expect(spoken(element().querySelector('.missing'))).toContain('10% is missing');
+      expect(server.settings.stages.parts).toEqual(before);
+      button('Add a stage').click();
+      await settle(700);
+      expect(server.settings.stages.parts.map(({ percent }) => percent)).toEqual([30, 40, 20, 10]);
+      const paid = grid().map((row) => Number(row.at(-1)?.replace(/,/g, '')));
+      const gross_minor = store.priced()!.price.gross_minor;
+      expect(Math.round(paid.reduce((sum, amount) => sum + amount, 0) * 100)).toBe(gross_minor);
+    });
+
+    it('and refuses a deposit and a retention that are more than the contract together', async () => {
+      await open('stages');
+      await type('Deposit', '97');
+      field('Retention').dispatchEvent(new Event('blur'));
+      await settle(700);
+      expect(spoken(element().querySelector('app-stage-terms-form [role="alert"]'))).toContain('Deposit and retention');
+      expect(server.settings.stages.deposit_percent).toBe(30);
+    });
+  });
+
+  describe('takes alternatives', () => {
+    const zoneOf = (id: string) => store.members().find((member) => member.id === id)!.zones;
+
+    async function begin(): Promise<void> {
+      await open('alternatives');
+      button('Add an alternative').click();
+      await settle();
+    }
+
+    it('with another way of a zone beside the first, as one step, at a price of its own', async () => {
+      await begin();
+      [...element().querySelectorAll<HTMLButtonElement>('.base button')][1].click();
+      await settle();
+      const [base, copy] = zoneOf(ids.edge);
+      expect(copy).toMatchObject({ name: base.name, alternativeId: store.settings()!.alternatives[0].id });
+      expect(store.settings()!.alternatives[0].replaces).toEqual([base.id]);
+      const bare = store.members().find(({ id }) => id === ids.edge)!;
+      const { id: _id, ...content } = bare;
+      store.changeMember(ids.edge, { ...content, zones: [base, { ...copy, buildUpId: 'bare', leafId: null }] });
+      await settle(1500);
+      const [, gross, difference] = grid()[0];
+      const own_minor = Math.round(Number(gross.replace(/,/g, '')) * 100);
+      expect(own_minor).toBeLessThan(store.priced()!.price.gross_minor);
+      expect(difference.startsWith('−')).toBe(true);
+    });
+
+    it('and removes one with all that stands in it alone', async () => {
+      await begin();
+      [...element().querySelectorAll<HTMLButtonElement>('.base button')][0].click();
+      await settle();
+      expect(store.members()).toHaveLength(3);
+      button('Remove the alternative').click();
+      await settle();
+      expect([store.members().length, store.settings()!.alternatives.length]).toEqual([2, 0]);
+      store.undo();
+      await settle();
+      expect([store.members().length, store.settings()!.alternatives.length]).toEqual([3, 1]);
+    });
+
+    it('and shows every figure with one, until the base is taken again', async () => {
+      await begin();
+      button('Show all figures with it').click();
+      await settle();
+      expect(spoken(element().querySelector('.shown'))).toContain('Another way');
+      button('Show the base again').click();
+      await settle();
+      expect(store.choice()).toEqual([]);
+    });
+  });
+
+  it('names the card it is worked on, and leaves it where it is in force', async () => {
+    await open('card');
+    const card = { id: ids.card, version: 1, name: 'Spring', state: 'in-force', from: '2026-03-01' };
+    http
+      .expectOne(({ url }) => url.startsWith('/api/rate-cards'))
+      .flush({
+        items: [{ ...card, basedOnId: null, changedAt: '2026-03-01T08:00:00.000Z' }],
+        next: null,
+        count: 1,
+        countIsExact: true,
+      });
+    await settle();
+    expect(spoken(element().querySelector('app-card-part'))).toContain('Spring”, in force from 1 Mar 2026');
+    expect(spoken(element().querySelector('app-card-part'))).toContain('It is the card in force.');
+  });
+
+  function memberContent(id: string) {
+    const { id: _id, ...content } = store.members().find((member) => member.id === id)!;
+    return content;
+  }
+});
