@@ -14,7 +14,7 @@ import { mount, type Route } from '../platform/http/mount';
 import type { CardInForceService } from './card-in-force-service';
 import type { CardWorkbookService } from './card-workbook-service';
 import type { DraftCardService } from './draft-card-service';
-import type { RateCardHead, RateCardRow } from './rate-card-model';
+import type { RateCardHead, RateCardRow } from './rate-card-service';
 import { presentRateCard, presentWholeRateCard } from './rate-card-presenter';
 import type { RateCardService } from './rate-card-service';
 

@@ -9,6 +9,8 @@ import type { AuditService, Doer } from '../audit';
 import type { Clock } from '../platform/clock/clock';
 import type { Page, PageAsked } from '../platform/database/workshop-rows';
 import type { RateCardHead, RateCardRow } from './rate-card-model';
+
+export type { RateCardHead, RateCardRow } from './rate-card-model';
 import type { CardsToday } from './rate-card-presenter';
 import type { RateCardRepository } from './rate-card-repository';
 

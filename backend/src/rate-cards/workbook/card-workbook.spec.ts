@@ -203,10 +203,14 @@ describe('A workbook that was changed', () => {
       workbook.getWorksheet('Grades')!.getCell('C2').value = 'much';
       workbook.getWorksheet('Leaf')!.getCell('E4').value = -1;
       workbook.getWorksheet('Tax categories')!.getCell('D2').value = 120;
+      workbook.getWorksheet('Recipes')!.getCell('B2').value = { formula: 'B3' };
     });
-    expect((await refusal(bytes)).map(([place]) => place).sort()).toEqual(
-      ['Grades 2 C', 'Leaf 4 E', 'Tax categories 2 D'].sort(),
-    );
+    expect((await refusal(bytes)).map(([place]) => place).sort()).toEqual([
+      'Grades 2 C',
+      'Leaf 4 E',
+      'Recipes 2 B',
+      'Tax categories 2 D',
+    ]);
   });
 });
 

@@ -4,6 +4,8 @@ import { Rejection } from '#shared/problems/rejection';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { rateCardSchema } from '#shared/rate-cards/rate-card-schema';
 import { cardTables } from '#shared/rate-cards/tables/card-parts';
+import type { WordCode } from '#shared/words/word-code';
+import type * as z from 'zod';
 import type { CardTable } from '#shared/rate-cards/tables/card-table';
 import { words } from '../../platform/http/words';
 import { CardBuilding } from './card-building';
@@ -28,6 +30,20 @@ function checkSheets(sheets: readonly FoundSheet[], building: CardBuilding): voi
   for (const { name } of sheets) if (!known.has(name)) building.complain([name], 'workbook-sheet-unknown');
 }
 
+/** Where whole sheets, columns or rows are missing, what the schema misses in their place is not worth telling. */
+const ofWhole: readonly WordCode[] = [
+  ...(['workbook-sheet-missing', 'workbook-heading-missing', 'workbook-row-missing'] as const),
+  'workbook-parent-unknown',
+];
+
+/** What the schema says of the cells, each cell complained of once. */
+function ofSchema(error: z.core.$ZodError, building: CardBuilding): Complaint[] {
+  const told = new Set(building.complaints.map(({ path }) => path.join('\n')));
+  if (building.complaints.some(({ code }) => ofWhole.includes(code))) return [];
+  const placed = complaintsOf(error).map((one) => ({ ...one, path: building.placeOf(one.path) }));
+  return placed.filter(({ path }) => !told.has(path.join('\n')));
+}
+
 function refuse(complaints: readonly Complaint[]): never {
   const told = complaints.slice(0, mostComplaints);
   throw new Rejection('invalid', 'workbook-faulty', { values: { count: complaints.length }, complaints: told });
@@ -43,8 +59,8 @@ export async function readCardWorkbook(bytes: Buffer, currency: string): Promise
     if (!sheet) building.complain([nameOf(table)], 'workbook-sheet-missing');
     else if (hasWhatItStandsIn(table, sheets)) readTable({ table, sheet, currency }, building);
   }
-  if (building.complaints.length > 0) refuse(building.complaints);
   const parsed = rateCardSchema.safeParse(building.card, { reportInput: true });
-  if (parsed.success) return parsed.data;
-  refuse(complaintsOf(parsed.error).map((one) => ({ ...one, path: building.placeOf(one.path) })));
+  const found = parsed.success ? [] : ofSchema(parsed.error, building);
+  if (parsed.success && building.complaints.length === 0) return parsed.data;
+  refuse([...building.complaints, ...found]);
 }

@@ -72,7 +72,7 @@ function readCell(reading: Reading<CardTable>, { column, path, row, at }: Cell):
   const place = placeAt(reading, row, reading.at[at] ?? 0);
   const read = fromSheetCell(column, reading.sheet.cell(row, reading.at[at] ?? 0));
   if ('refused' in read) reading.building.complain(place, read.refused);
-  else reading.building.put(path, read.value, place);
+  reading.building.put(path, 'refused' in read ? undefined : read.value, place);
 }
 
 /** The list a row belongs to: that of the item its first ids name. */

@@ -143,6 +143,13 @@ describe('FigureTable', () => {
     await press('ArrowUp', ' ');
     expect(fixture.componentInstance.chosen()).toBe('a');
   });
+
+  it('takes what fast fingers typed and finished before the editor was there', async () => {
+    for (const key of ['A', ' ', 'b', 'Enter'])
+      current().dispatchEvent(new KeyboardEvent('keydown', { key, bubbles: true, cancelable: true }));
+    await fixture.whenStable();
+    expect(fixture.componentInstance.edits).toEqual([{ rowId: 'a', key: 'name', text: 'A b' }]);
+  });
 });
 
 @Component({

@@ -83,7 +83,12 @@ export class FigureTable<Row> {
     if (event.altKey || event.metaKey) return;
     const isWritten = event.key.length === 1 && event.key !== ' ' && !event.ctrlKey;
     // The editor has opened but is not there yet: fast fingers lose nothing.
-    if (this.draft() !== undefined) return isWritten ? this.draft.update((text) => `${text}${event.key}`) : undefined;
+    const draft = this.draft();
+    if (draft !== undefined) {
+      if (event.key.length === 1 && !event.ctrlKey) this.draft.set(`${draft}${event.key}`);
+      else this.pressInEditor(event, draft);
+      return;
+    }
     const next = placeAfter(event.ctrlKey ? `Control+${event.key}` : event.key, this.place(), this.size());
     if (next) this.move(next);
     else if (event.key === 'Enter' || event.key === 'F2') this.open();
