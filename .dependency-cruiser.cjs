@@ -14,7 +14,7 @@ const installed = (names) => `(^|/)node_modules/(@types/)?${anyOf(names)}/`;
 const typesOnly = '(^|/)node_modules/@types/';
 const spec = '\\.spec\\.ts$';
 const testSupport = '^(test|frontend/src/test)/';
-const schemaOrEndpoints = '^shared/(endpoints|.+(-schema|-endpoints|/endpoint))\\.ts$';
+const schemaOrEndpoints = '^(shared/(endpoints|.+(-schema|-endpoints|/endpoint))|frontend/src/app/.+-schema)\\.ts$';
 const calculator = '^shared/(?!endpoints\\.ts|.+(-schema|-endpoints|/endpoint)\\.ts).+\\.ts$';
 const worker = '-worker\\.ts$';
 const serverEntry = '^backend/src/[^/]+\\.ts$';
@@ -138,19 +138,20 @@ const techniques = [
     },
     to: { path: installed(['sequelize', 'mariadb', 'umzug']) },
   }),
-  never('Zod stays in schemas, endpoints, problems, platform/config, platform/http and the core of the page', {
-    comment: 'A calculation is given what a schema has let through; it does not ask again.',
+  never('Zod stays in schemas, endpoints, forms, problems, platform/config, platform/http and the core of the page', {
+    comment:
+      'A calculation is given what a schema has let through; it does not ask again. Its types may be named anywhere.',
     from: {
       pathNot: [
         schemaOrEndpoints,
         '^shared/problems/',
         '^backend/src/platform/(config|http)/',
-        '^frontend/src/(main\\.ts$|app/core/)',
+        '^frontend/src/(main\\.ts$|app/core/|app/.*-form\\.ts$)',
         spec,
         testSupport,
       ],
     },
-    to: { path: installed(['zod']) },
+    to: { path: installed(['zod']), dependencyTypesNot: ['type-only'] },
   }),
   never('A route asks its service, never the rows', {
     comment: 'Route, service, repository: one request is read in that order.',

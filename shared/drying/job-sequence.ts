@@ -1,7 +1,8 @@
 import type { HoldPoint } from '#shared/buildups/buildup';
 import { systemOrderFindings } from '#shared/buildups/system-order-findings';
 import type { Span } from '#shared/drying/free-span';
-import type { LotSequence, SequenceStep } from '#shared/drying/lot-sequence';
+import type { LotSequence } from '#shared/drying/lot-sequence';
+import type { SequenceStep } from '#shared/drying/sequence-step';
 import { placedInPortions, type PlacedTask } from '#shared/drying/placed-in-portions';
 import type { PlacedCoat } from '#shared/drying/placed-block';
 import type { BusyGrades } from '#shared/drying/timed-step';

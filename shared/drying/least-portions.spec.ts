@@ -1,5 +1,5 @@
 import { leastPortions } from '#shared/drying/least-portions';
-import type { SequenceStep } from '#shared/drying/lot-sequence';
+import type { SequenceStep } from '#shared/drying/sequence-step';
 
 const time = { day_minutes: 480, days: 5, productiveShare_percent: 100 };
 const day = 1440;

@@ -1,5 +1,5 @@
 import { dayLength_minutes } from '#shared/drying/day-length-minutes';
-import type { SequenceStep } from '#shared/drying/lot-sequence';
+import type { SequenceStep } from '#shared/drying/sequence-step';
 import type { WorkingTime } from '#shared/drying/working-time';
 import { countUp } from '#shared/money/settled';
 

@@ -1,5 +1,5 @@
 import { freeSpan, type Span } from '#shared/drying/free-span';
-import type { SequenceStep } from '#shared/drying/lot-sequence';
+import type { SequenceStep } from '#shared/drying/sequence-step';
 import type { TimedStep } from '#shared/drying/timed-step';
 import type { WorkingTime } from '#shared/drying/working-time';
 

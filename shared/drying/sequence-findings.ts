@@ -1,5 +1,5 @@
 import type { DryingCard } from '#shared/drying/drying-card';
-import type { SequenceStep } from '#shared/drying/lot-sequence';
+import type { SequenceStep } from '#shared/drying/sequence-step';
 import type { Finding } from '#shared/words/finding';
 
 /** What to know about the steps of a lot: which wait for somebody, and what the trade does when a window was missed. */

@@ -1,4 +1,4 @@
-import type { SequenceStep } from '#shared/drying/lot-sequence';
+import type { SequenceStep } from '#shared/drying/sequence-step';
 
 /** Steps of a lot that upper limits tie together: they are started only when all of them can be done inside their times. */
 export interface StepBlock {

@@ -1,5 +1,5 @@
 import type { BusySpans } from '#shared/drying/free-span';
-import type { SequenceStep } from '#shared/drying/lot-sequence';
+import type { SequenceStep } from '#shared/drying/sequence-step';
 import type { WorkingTime } from '#shared/drying/working-time';
 import { countUp } from '#shared/money/settled';
 

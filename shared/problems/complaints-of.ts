@@ -1,4 +1,4 @@
-import * as z from 'zod';
+import type * as z from 'zod';
 import type { Complaint } from '#shared/problems/complaint';
 import type { WordCode, WordValues } from '#shared/words/word-code';
 

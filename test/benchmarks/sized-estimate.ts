@@ -23,17 +23,27 @@ const shapes: readonly Shape[] = [
   { kind: 'band', length: { by: 'tape', length_mm: 2400 }, height_mm: 85, closed: true },
 ];
 
-const buildUps = ['water-burnished', 'water-matte', 'oil-3-hour'] as const;
+interface Finish {
+  readonly buildUpId: string;
+  readonly leafId: string | null;
+}
+
+const leafId = 'gold-23-5-loose';
+const onWater: readonly Finish[] = [
+  { buildUpId: 'water-burnished', leafId },
+  { buildUpId: 'water-matte', leafId },
+];
+const onOil: Finish = { buildUpId: 'oil-3-hour', leafId };
+const painted: Finish = { buildUpId: 'paint', leafId: null };
 const ornaments = ['egg-and-dart', 'acanthus-leaf', 'rosette', 'bead-and-reel'] as const;
 
-const zoneOf = (memberId: string, place: number): Zone => ({
+const zoneOf = (memberId: string, place: number, finish: Finish): Zone => ({
   id: `${memberId} zone ${place}`,
   name: `Zone ${place + 1}`,
   take: { way: 'share', share_percent: place === 2 ? 30 : 35 },
   relief: place === 0 ? 'middle' : 'low',
   finish: null,
-  buildUpId: buildUps[place],
-  leafId: 'gold-23-5-loose',
+  ...finish,
   laying: { way: 'proposed', strips: null, cuts: null },
   chosenStepIds: [],
   burnished_percent: null,
@@ -74,7 +84,7 @@ function memberOf(place: number): MemberContent & { readonly id: string } {
     timberId: 'lime',
     shape: shapes[place % shapes.length],
     openings: [],
-    zones: [0, 1, 2].map((zone) => zoneOf(id, zone)),
+    zones: [...onWater, place % 2 === 0 ? onOil : painted].map((finish, zone) => zoneOf(id, zone, finish)),
     ornaments: sizes_mm.map((size_mm, ornament) => ornamentOf(id, ornament, size_mm + (place % 7))),
     lot: '',
     note: '',

@@ -18,6 +18,8 @@ export interface Recalculated {
   readonly named: (name: string) => number;
   /** Changes a named cell; everything that hangs on it follows. */
   readonly change: (name: string, value: number) => void;
+  /** Reads every formula again and recalculates all of it. */
+  readonly rebuild: () => void;
 }
 
 type Content = string | number | boolean | null;
@@ -97,5 +99,6 @@ export async function recalculated(bytes: Buffer): Promise<Recalculated> {
     at: (sheet, address) => engine.getCellValue(cell({ sheet, address })),
     named: (name) => Number(engine.getCellValue(cell(place(name)))),
     change: (name, value) => void engine.setCellContents(cell(place(name)), value),
+    rebuild: () => engine.rebuildAndRecalculate(),
   };
 }

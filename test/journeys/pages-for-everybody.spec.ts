@@ -17,7 +17,7 @@ afterAll(() => walk.end());
 async function violations(page: Page): Promise<string[]> {
   // Evaluated by the debugger, which no policy of the page stands against.
   await page.evaluate(axe);
-  const results = (await page.evaluate(`axe.run({ runOnly: ${JSON.stringify(rules)} })`)) as AxeResults;
+  const results = await page.evaluate<AxeResults>(`axe.run({ runOnly: ${JSON.stringify(rules)} })`);
   return results.violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html.slice(0, 160)).join(' | ')}`);
 }
 

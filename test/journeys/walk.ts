@@ -43,10 +43,13 @@ export interface Person {
 export class Walk {
   private constructor(
     readonly api: Api,
-    readonly address: string,
     private readonly server: Server,
     private readonly browser: Browser,
   ) {}
+
+  get address(): string {
+    return `http://127.0.0.1:${(this.server.address() as AddressInfo).port}`;
+  }
 
   static async begin(): Promise<Walk> {
     const api = await startApi({ WEB_DIR: join(root, 'dist/web') });
@@ -54,7 +57,7 @@ export class Walk {
     await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
     const browser = await chromium.launch({ executablePath: '/usr/bin/chromium', args: quiet });
     mkdirSync(pictures, { recursive: true });
-    return new Walk(api, `http://127.0.0.1:${(server.address() as AddressInfo).port}`, server, browser);
+    return new Walk(api, server, browser);
   }
 
   async end(): Promise<void> {

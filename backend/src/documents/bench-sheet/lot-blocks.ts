@@ -1,5 +1,5 @@
 import type { DryLot } from '#shared/estimates/dry-figures';
-import type { SequenceStep } from '#shared/drying/lot-sequence';
+import type { SequenceStep } from '#shared/drying/sequence-step';
 import { drawnStrip } from '../drawn-strips';
 import { figureRows, figureWidth } from '../paper/figure-rows';
 import type { Block } from '../paper/flow';

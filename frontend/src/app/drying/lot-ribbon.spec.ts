@@ -1,4 +1,4 @@
-import type { SequenceStep } from '#shared/drying/lot-sequence';
+import type { SequenceStep } from '#shared/drying/sequence-step';
 import { lotRibbon } from './lot-ribbon';
 import { closedBars, ribbonRow, ribbonTicks } from './ribbon-view';
 import type { WorkedLot, WorkedTask } from './worked-lot';

@@ -1,4 +1,4 @@
-import type { SequenceStep } from '#shared/drying/lot-sequence';
+import type { SequenceStep } from '#shared/drying/sequence-step';
 import type { WorkingTime } from '#shared/drying/working-time';
 import type { WorkedLot, WorkedTask } from './worked-lot';
 import { type Stretch, workingParts } from './working-parts';

@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import { dayLength_minutes, dayOf } from '#shared/drying/day-length-minutes';
-import type { SequenceStep } from '#shared/drying/lot-sequence';
+import type { SequenceStep } from '#shared/drying/sequence-step';
 import type { Finding } from '#shared/words/finding';
 import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';

@@ -1,4 +1,4 @@
-import type { SequenceStep } from '#shared/drying/lot-sequence';
+import type { SequenceStep } from '#shared/drying/sequence-step';
 
 /** One stretch of hands-on work of a coat, in elapsed minutes from the start of the job. */
 export interface WorkedTask {
