@@ -23,8 +23,7 @@ describe('JobEstimates', () => {
     await new Promise((resolve) => setTimeout(resolve));
     await fixture.whenStable();
   };
-  const button = (text: string) =>
-    [...element().querySelectorAll('button')].find((one) => spoken(one) === text) as HTMLButtonElement | undefined;
+  const button = (text: string) => [...element().querySelectorAll('button')].find((one) => spoken(one) === text);
 
   async function open(items: unknown[], roles: readonly Role[] = ['estimator']): Promise<void> {
     TestBed.configureTestingModule({

@@ -1,4 +1,10 @@
-import { noProfitEntries, profitEntriesOf, profitFormSchema, profitSaidAs, profitSettingsOf } from './profit-form-schema';
+import {
+  noProfitEntries,
+  profitEntriesOf,
+  profitFormSchema,
+  profitSaidAs,
+  profitSettingsOf,
+} from './profit-form-schema';
 
 const entries = { ...noProfitEntries, taxCategoryId: 'standard' };
 const paths = (given: object) =>
