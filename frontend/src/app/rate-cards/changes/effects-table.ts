@@ -70,7 +70,7 @@ export class EffectsTable {
   }
 
   private share({ before_minor, after_minor }: CardEffect): string {
-    if (before_minor === 0) return '';
+    if (before_minor === 0 || after_minor === before_minor) return '';
     const percent = ((after_minor - before_minor) / before_minor) * 100;
     const text = this.formats.figure('percent', Math.abs(percent));
     return percent < 0 ? `− ${text}` : `+ ${text}`;
