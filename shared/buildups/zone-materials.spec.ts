@@ -54,7 +54,6 @@ const needing = (materialId: string, amount: number): MaterialNeed => ({
   stepId: 'step',
   zoneId: 'zone',
   quantity: amount,
-  reason: { code: 'buildup-one-batch', values: {}, figure: amount, unit: 'number' },
 });
 
 describe('materials bought for a job', () => {

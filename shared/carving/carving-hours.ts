@@ -1,7 +1,7 @@
 import type { CarvingCard } from '#shared/carving/carving-card';
 import type { CarvingHoursRow, CarvingResult, OrnamentHours, UseHours } from '#shared/carving/carving-result';
 import type { CarvingWork } from '#shared/carving/carving-work';
-import { gradesTogether, hoursOfKinds, rowsTogether, sharpeningRows } from '#shared/carving/hours-rows';
+import { gradesTogether, hoursOfKinds, rowsTogether, sharpeningRows } from '#shared/carving/hours-of-kinds';
 import { hoursOfUses, unknownOrnaments } from '#shared/carving/hours-of-uses';
 import { patternHours, patternRows } from '#shared/carving/pattern-hours';
 import { recutHours, recutRows, recutRowsOfUse, recutZonesById } from '#shared/carving/recut-hours';

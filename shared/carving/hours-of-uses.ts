@@ -3,7 +3,7 @@ import type { UseHours } from '#shared/carving/carving-result';
 import type { CarvedUse } from '#shared/carving/carving-work';
 import { type LearntPieces, learntPieces } from '#shared/carving/learnt-pieces';
 import type { CarvingItem, Ornament } from '#shared/carving/ornament';
-import { itemHours, ornamentHours } from '#shared/carving/use-hours';
+import { itemHours, ornamentHours } from '#shared/carving/ornament-hours';
 import { type UseQuantity, useQuantity } from '#shared/carving/use-quantity';
 import type { Finding } from '#shared/words/finding';
 

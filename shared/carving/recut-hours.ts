@@ -1,7 +1,7 @@
 import type { CarvingCard } from '#shared/carving/carving-card';
 import type { CarvingHoursRow, RecutHours, UseHours } from '#shared/carving/carving-result';
 import type { RecutZone } from '#shared/carving/carving-work';
-import { ornamentCarving } from '#shared/carving/hours-rows';
+import { ornamentCarving } from '#shared/carving/hours-of-kinds';
 import { groupedBy } from '#shared/units/grouped-by';
 import { mapTriple, type Triple } from '#shared/units/triple';
 import type { Reason } from '#shared/words/reason';
@@ -51,6 +51,7 @@ export const recutRows = (recut: readonly RecutHours[], card: CarvingCard): Carv
 
 /** The zones recut, to be found by their id. */
 export type RecutZones = ReadonlyMap<string | null, readonly RecutZone[]>;
+/** Zones recut in gesso by their id, for looking up; areas in mm² as they were given. */
 export const recutZonesById = (zones: readonly RecutZone[]): RecutZones => groupedBy(zones, (zone) => zone.zoneId);
 
 /** Recutting one use brings with it, where its zone is recut; none for zones recut by area. */

@@ -1,12 +1,4 @@
-import type {
-  BuildUp,
-  BuildUpStep,
-  HoldPoint,
-  MissedWindow,
-  StepKind,
-  StepLag,
-  System,
-} from '#shared/buildups/buildup';
+import type { BuildUp, BuildUpStep, System } from '#shared/buildups/buildup';
 import type { BuildUpCard } from '#shared/buildups/buildup-card';
 import type { LotStep, LotWork } from '#shared/buildups/lot-works';
 import type { Climate } from '#shared/drying/climate';

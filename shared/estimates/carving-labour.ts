@@ -1,5 +1,5 @@
 import type { CarvingHoursRow, CarvingResult, UseHours } from '#shared/carving/carving-result';
-import { likelyByGrade, ornamentCarving, sharpeningRows } from '#shared/carving/hours-rows';
+import { likelyByGrade, ornamentCarving, sharpeningRows } from '#shared/carving/hours-of-kinds';
 import { patternRows } from '#shared/carving/pattern-hours';
 import { recutRowsOfUse, type RecutZones } from '#shared/carving/recut-hours';
 import type { PriceLabour } from '#shared/estimates/price/price-input';

@@ -10,7 +10,7 @@ import type { LayPlanBand } from '#shared/leaf/lay-plan';
 import type { LaysOption } from '#shared/leaf/lays-laying';
 import type { LeafPurchase } from '#shared/leaf/leaf-purchase';
 import type { LeafTotal } from '#shared/leaf/leaf-totals';
-import type { ZoneLeaf } from '#shared/leaf/zone-leaf-result';
+import type { ZoneLeaf } from '#shared/leaf/laying';
 import type { SurfaceFinish } from '#shared/measure/relief';
 import type { SurfacePart } from '#shared/measure/surface';
 import type { DecimalText } from '#shared/money/decimal';

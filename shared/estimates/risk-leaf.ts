@@ -6,7 +6,7 @@ import { bookletsFor } from '#shared/leaf/booklets-for';
 import type { LeafProduct } from '#shared/leaf/leaf-product';
 import { bookletPrices } from '#shared/leaf/leaf-purchase';
 import type { LeafTotal } from '#shared/leaf/leaf-totals';
-import type { ZoneLeaf } from '#shared/leaf/zone-leaf-result';
+import type { ZoneLeaf } from '#shared/leaf/laying';
 import { minorOf } from '#shared/money/minor-of';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { mapTriple, type Triple } from '#shared/units/triple';

@@ -3,7 +3,7 @@ import { recipeBatches } from '#shared/buildups/recipe-batches';
 import { sectionStrip } from '#shared/buildups/section-strip';
 import type { StepHours } from '#shared/buildups/step-hours';
 import type { UseHours } from '#shared/carving/carving-result';
-import { rowsTogether } from '#shared/carving/hours-rows';
+import { rowsTogether } from '#shared/carving/hours-of-kinds';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import { dryFigures } from '#shared/estimates/dry-figures';
 import type { EstimateWork } from '#shared/estimates/estimate-work';

@@ -11,7 +11,7 @@ import type { EstimateSettings } from '#shared/estimates/settings';
 import { needsSeal } from '#shared/leaf/leaf-findings';
 import type { LeafProduct } from '#shared/leaf/leaf-product';
 import { zoneLeaf } from '#shared/leaf/zone-leaf';
-import type { ZoneLeaf } from '#shared/leaf/zone-leaf-result';
+import type { ZoneLeaf } from '#shared/leaf/laying';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import type { Finding } from '#shared/words/finding';
 

@@ -1,6 +1,6 @@
 import type { LayPlanBand } from '#shared/leaf/lay-plan';
 import type { LeafStep } from '#shared/leaf/leaf-step';
-import type { Laying } from '#shared/leaf/zone-leaf-result';
+import type { Laying } from '#shared/leaf/laying';
 
 const square = (area_mm2: number, piece_mm: number, lap_mm: number): LayPlanBand => {
   const side_mm = Math.sqrt(area_mm2);

@@ -2,7 +2,7 @@ import type { LaysLaying } from '#shared/leaf/lays-laying';
 import type { PatchesLaying } from '#shared/leaf/patches-laying';
 import type { RibbonLaying } from '#shared/leaf/ribbon-laying';
 import type { SheetField, SheetsLaying } from '#shared/leaf/sheets-laying';
-import type { Laying } from '#shared/leaf/zone-leaf-result';
+import type { Laying } from '#shared/leaf/laying';
 import type { Reason } from '#shared/words/reason';
 
 const ofField = (field: SheetField, step_mm: number): Reason[] => {

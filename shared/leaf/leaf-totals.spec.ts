@@ -1,7 +1,7 @@
 import { leafOrder } from '#shared/leaf/leaf-order';
 import { leafTotals } from '#shared/leaf/leaf-totals';
 import { startLeaf } from '#shared/leaf/start-leaf';
-import type { ZoneLeaf } from '#shared/leaf/zone-leaf-result';
+import type { ZoneLeaf } from '#shared/leaf/laying';
 
 const zone = (productId: string, leaves: number, trueArea_mm2: number): ZoneLeaf => ({
   zoneId: `${productId} ${leaves}`,

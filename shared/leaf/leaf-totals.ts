@@ -4,7 +4,7 @@ import { type LeafCoverage, leafCoverage } from '#shared/leaf/leaf-coverage';
 import { type LeafPurchase, leafPurchase } from '#shared/leaf/leaf-purchase';
 import type { LeafProduct } from '#shared/leaf/leaf-product';
 import { thicknessFindings } from '#shared/leaf/implied-thickness';
-import type { ZoneLeaf } from '#shared/leaf/zone-leaf-result';
+import type { ZoneLeaf } from '#shared/leaf/laying';
 import { D, type DecimalText } from '#shared/money/decimal';
 import { settled } from '#shared/money/settled';
 import type { Triple } from '#shared/units/triple';

@@ -7,7 +7,7 @@ import { patchesLaying } from '#shared/leaf/patches-laying';
 import { ribbonLaying } from '#shared/leaf/ribbon-laying';
 import { sheetsLaying } from '#shared/leaf/sheets-laying';
 import type { ZoneLeafInput } from '#shared/leaf/zone-leaf-input';
-import type { Laying } from '#shared/leaf/zone-leaf-result';
+import type { Laying } from '#shared/leaf/laying';
 import type { Finding, FindingKind } from '#shared/words/finding';
 import type { WordCode, WordValues } from '#shared/words/word-code';
 

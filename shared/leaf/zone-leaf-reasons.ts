@@ -1,6 +1,6 @@
 import { layingReasons } from '#shared/leaf/laying-reasons';
 import type { ZoneLeafInput } from '#shared/leaf/zone-leaf-input';
-import type { ZoneLeaf } from '#shared/leaf/zone-leaf-result';
+import type { ZoneLeaf } from '#shared/leaf/laying';
 import type { Reason } from '#shared/words/reason';
 
 type Worked = Omit<ZoneLeaf, 'reasons' | 'findings'>;

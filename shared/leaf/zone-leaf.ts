@@ -4,7 +4,7 @@ import type { LeafCard } from '#shared/leaf/leaf-card';
 import type { LeafProduct } from '#shared/leaf/leaf-product';
 import type { ZoneLeafInput } from '#shared/leaf/zone-leaf-input';
 import { zoneLeafReasons } from '#shared/leaf/zone-leaf-reasons';
-import type { Laying, ZoneLeaf } from '#shared/leaf/zone-leaf-result';
+import type { Laying, ZoneLeaf } from '#shared/leaf/laying';
 import { zoneLaying } from '#shared/leaf/zone-laying';
 import { grossPercentile, grossTriple, zoneLosses } from '#shared/leaf/zone-losses';
 import { mapTriple } from '#shared/units/triple';

@@ -9,4 +9,5 @@ export interface Unread {
   readonly values: WordValues;
 }
 
+/** What could not be read, as a code of the catalogue with its values. */
 export const unread = (code: WordCode, values: WordValues = {}): Unread => ({ ok: false, code, values });

@@ -19,7 +19,7 @@ const families = new Set([
 /** What an ending promises, and the one side it belongs to. */
 const sideOfSuffix = {
   'backend/src': ['routes', 'service', 'policy', 'repository', 'model', 'presenter'],
-  'frontend/src/app': ['routes', 'page', 'form', 'store'],
+  'frontend/src/app': ['routes', 'page', 'form', 'store', 'schema'],
   shared: ['schema', 'endpoints'],
 } as const;
 
@@ -42,7 +42,11 @@ function bearsNameOf(file: string, identifier: string): boolean {
   return asked.every((word) => formsOf(word).some((form) => said.includes(form)));
 }
 
+/** Start data of the demonstration is gathered by what it tells. */
+const isStartData = (file: string): boolean => file.startsWith('seeders/');
+
 function isNamedAfterItsExport(file: string): boolean {
+  if (isStartData(file)) return true;
   const exported = publicExports(file);
   return exported.length === 0 || exported.some(({ name }) => bearsNameOf(file, name));
 }

@@ -1,6 +1,6 @@
 import type { Block, Flow } from './paper/flow';
 import type { Pdf } from './paper/open-paper';
-import { textStyles } from './paper/paper-look';
+import { textStyles } from './paper/paper-colours';
 import { widthOf } from './paper/text-block';
 import { textLines, writeLine } from './paper/text-lines';
 

@@ -1,7 +1,7 @@
 import type { SnapshotWorkshop } from '#shared/estimates/snapshot';
 import type { Block, Flow } from './paper/flow';
 import type { Pdf } from './paper/open-paper';
-import { paperColours, textStyles } from './paper/paper-look';
+import { paperColours, textStyles } from './paper/paper-colours';
 import { textLines, writeLine } from './paper/text-lines';
 import type { PaperWords } from './paper-words';
 

@@ -10,7 +10,7 @@ import { memberRepository, pieceRepository } from './content-repository';
 import { EstimateRepository } from './estimate-repository';
 import { estimateRoutes } from './estimate-routes';
 import { EstimateService } from './estimate-service';
-import type { PaperMaker } from './issue-papers';
+import type { PaperMaker } from './paper-maker';
 import { IssueRepository } from './issue-repository';
 import { issueRoutes } from './issue-routes';
 import { IssueService } from './issue-service';
@@ -19,7 +19,7 @@ import { PresenceService } from './presence-service';
 import { ReadingRepository } from './reading-repository';
 import { ReadingService } from './reading-service';
 
-export type { BenchSheetRequest, PaperFile, PaperMaker } from './issue-papers';
+export type { BenchSheetRequest, PaperFile, PaperMaker } from './paper-maker';
 export type { EstimateService } from './estimate-service';
 export type { IssueService } from './issue-service';
 

@@ -16,7 +16,7 @@ import type { EstimateParts, EstimateService } from './estimate-service';
 import { presentEstimate } from './estimate-presenter';
 import { frozenSnapshot, thawedSnapshot, wholeOfSnapshot } from './frozen-snapshot';
 import type { IssueRow } from './issue-model';
-import type { PaperMaker } from './issue-papers';
+import type { PaperMaker } from './paper-maker';
 import { mayBeIssued, mayBeMarked } from './issue-policy';
 import { presentIssue } from './issue-presenter';
 import type { IssueRepository } from './issue-repository';

@@ -26,6 +26,7 @@ export interface LineWork {
 
 const nothing = new D(0);
 
+/** Sum of decimal amounts, all of one unit. */
 export const sumOf = (amounts: readonly D[]): D => amounts.reduce((sum, amount) => sum.plus(amount), nothing);
 
 /** Direct cost of a line: everything spent on it, in unrounded minor units. */

@@ -11,7 +11,7 @@ export interface QuantileTable {
   readonly guide: Uint16Array;
 }
 
-/** A table from cumulative sums of any scale, at places low, low + step, … */
+/** A table of quantiles from rising cumulative sums of any scale and unit, at places low, low + step, …; its quantiles bear the unit of the places. */
 export function quantileTable(low: number, step: number, sums: Float64Array): QuantileTable {
   const last = sums.length - 1;
   const cumulative = sums.map((sum) => sum / sums[last]);

@@ -6,7 +6,7 @@ import { finishedPaper } from '../paper/finished-paper';
 import type { Block } from '../paper/flow';
 import { listBlock } from '../paper/list-blocks';
 import type { Pdf } from '../paper/open-paper';
-import { textStyles } from '../paper/paper-look';
+import { textStyles } from '../paper/paper-colours';
 import { sectionBlocks } from '../paper/section-blocks';
 import { textBlock } from '../paper/text-block';
 import { benchContent, type BenchContent } from './bench-content';

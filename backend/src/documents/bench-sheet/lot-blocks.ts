@@ -4,7 +4,7 @@ import { drawnStrip } from '../drawn-strips';
 import { figureRows, figureWidth } from '../paper/figure-rows';
 import type { Block } from '../paper/flow';
 import type { Pdf } from '../paper/open-paper';
-import { textStyles } from '../paper/paper-look';
+import { textStyles } from '../paper/paper-colours';
 import { partBlocks, sectionBlocks } from '../paper/section-blocks';
 import { tableBlock, type TableRow } from '../paper/table-block';
 import type { BenchContent } from './bench-content';

@@ -1,6 +1,6 @@
 import type { Block, Flow } from '../paper/flow';
 import type { Pdf } from '../paper/open-paper';
-import { paperColours, textStyles } from '../paper/paper-look';
+import { paperColours, textStyles } from '../paper/paper-colours';
 import { sectionBlocks } from '../paper/section-blocks';
 import { textBlock, widthOf } from '../paper/text-block';
 import { writeLine } from '../paper/text-lines';

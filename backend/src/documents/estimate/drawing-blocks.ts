@@ -4,7 +4,7 @@ import { drawnStrip } from '../drawn-strips';
 import { figureRows, figureWidth } from '../paper/figure-rows';
 import type { Block } from '../paper/flow';
 import type { Pdf } from '../paper/open-paper';
-import { textStyles } from '../paper/paper-look';
+import { textStyles } from '../paper/paper-colours';
 import { sectionBlocks } from '../paper/section-blocks';
 import { textBlock } from '../paper/text-block';
 import type { IssueContent } from './issue-content';

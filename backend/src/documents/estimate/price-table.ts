@@ -3,10 +3,10 @@ import { sectionsByKind, sectionsByMember } from '#shared/estimates/price/price-
 import type { MinorUnits } from '#shared/money/decimal';
 import type { Block } from '../paper/flow';
 import type { Pdf } from '../paper/open-paper';
-import { textStyles } from '../paper/paper-look';
+import { textStyles } from '../paper/paper-colours';
 import { tableBlock, type TableRow } from '../paper/table-block';
 import type { IssueContent } from './issue-content';
-import { kindName, lineNote, memberName, memberNote } from './line-names';
+import { kindName, lineNote, memberName, memberNote } from './line-note';
 import { sumRows } from './sum-rows';
 
 const lineRow = (name: string, note: string, amount: string): TableRow => ({

@@ -1,5 +1,5 @@
 import type { PriceTax } from '#shared/estimates/price/price';
-import { textStyles, type TextStyle } from '../paper/paper-look';
+import { textStyles, type TextStyle } from '../paper/paper-colours';
 import type { TableRow } from '../paper/table-block';
 import type { IssueContent } from './issue-content';
 

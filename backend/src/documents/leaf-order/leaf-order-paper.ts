@@ -8,7 +8,7 @@ import { letterheadBlock, printableLogo } from '../letterhead';
 import { finishedPaper } from '../paper/finished-paper';
 import type { Block } from '../paper/flow';
 import type { Pdf } from '../paper/open-paper';
-import { textStyles } from '../paper/paper-look';
+import { textStyles } from '../paper/paper-colours';
 import { tableBlock, type TableRow } from '../paper/table-block';
 import { textBlock } from '../paper/text-block';
 import { paperWords, type PaperWords } from '../paper-words';

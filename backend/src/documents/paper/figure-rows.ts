@@ -1,7 +1,7 @@
 import type { CaptionedFigure } from './figure';
 import type { Block, Flow } from './flow';
 import type { Pdf } from './open-paper';
-import { textStyles } from './paper-look';
+import { textStyles } from './paper-colours';
 import { widthOf } from './text-block';
 import { textLines, writeLine } from './text-lines';
 

@@ -1,5 +1,5 @@
 import type { Pdf } from './open-paper';
-import { pageMargins, paperColours } from './paper-look';
+import { pageMargins, paperColours } from './paper-colours';
 
 /** What stands on a page by itself: it begins where its first part fits, and breaks where it may. */
 export interface Block {

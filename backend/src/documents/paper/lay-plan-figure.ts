@@ -1,7 +1,7 @@
 import type { LayPlan } from '#shared/leaf/lay-plan';
 import type { Figure } from './figure';
 import type { Pdf } from './open-paper';
-import { paperColours } from './paper-look';
+import { paperColours } from './paper-colours';
 import { fittingScale } from './view-layout';
 
 /** A lay plan within a box in points, with what it shows in words. */

@@ -1,6 +1,6 @@
 import type { Block } from './flow';
 import type { Pdf } from './open-paper';
-import { paperColours, textStyles } from './paper-look';
+import { paperColours, textStyles } from './paper-colours';
 import { textBlock } from './text-block';
 import { writeLine } from './text-lines';
 

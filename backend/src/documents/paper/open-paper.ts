@@ -1,6 +1,6 @@
 import PDFDocument from 'pdfkit';
 import { paperFonts } from './paper-fonts';
-import { pageMargins, type PaperFont } from './paper-look';
+import { pageMargins, type PaperFont } from './paper-colours';
 import { printableText } from './printable-text';
 
 /** What a paper is, apart from what stands on it. */

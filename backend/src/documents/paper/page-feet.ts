@@ -1,5 +1,5 @@
 import type { Pdf } from './open-paper';
-import { pageMargins, paperColours, textStyles } from './paper-look';
+import { pageMargins, paperColours, textStyles } from './paper-colours';
 import { fittedLine, writeLine } from './text-lines';
 
 /** What stands at the foot of every page, and at the head of all but the first. */

@@ -1,6 +1,6 @@
 import { existsSync, readFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
-import type { PaperFont } from './paper-look';
+import type { PaperFont } from './paper-colours';
 
 const fileNames: Readonly<Record<PaperFont, string>> = {
   heading: 'alegreya-500.ttf',

@@ -3,7 +3,7 @@ import type { DrawingView } from '#shared/measure/drawing/drawing';
 import { dimensionPlaces } from './dimension-places';
 import { fileName } from '../file-names';
 import { openPaper } from './open-paper';
-import { textStyles } from './paper-look';
+import { textStyles } from './paper-colours';
 import { printableText } from './printable-text';
 import { fittedLine, textLines, textWidth } from './text-lines';
 import { viewLayout } from './view-layout';

@@ -1,6 +1,6 @@
 import type { Block, Flow } from './flow';
 import type { Pdf } from './open-paper';
-import { textStyles, type TextStyle } from './paper-look';
+import { textStyles, type TextStyle } from './paper-colours';
 import { textBlock } from './text-block';
 
 interface HeadingSetting {

@@ -2,7 +2,7 @@ import type { LayerColour } from '#shared/buildups/buildup';
 import type { LeafMetal } from '#shared/leaf/leaf-product';
 import type { Figure } from './figure';
 import type { Pdf } from './open-paper';
-import { paperColours, textStyles } from './paper-look';
+import { paperColours, textStyles } from './paper-colours';
 import { fittedLine, writeLine } from './text-lines';
 
 /** One layer as it is drawn: its name, its coats in words, what it is made of, how thick it is against a coat of gesso. */

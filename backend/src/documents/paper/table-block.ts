@@ -1,11 +1,11 @@
 import type { Block, Flow } from './flow';
 import type { Pdf } from './open-paper';
-import { paperColours } from './paper-look';
-import { type LaidColumn, laidColumns, laidRow, type LaidRow, type TableColumn, type TableRow } from './table-layout';
+import { paperColours } from './paper-colours';
+import { type LaidColumn, laidColumns, laidRow, type LaidRow, type TableColumn, type TableRow } from './laid-columns';
 import { writeLine } from './text-lines';
 import { widthOf } from './text-block';
 
-export type { TableCell, TableColumn, TableRow } from './table-layout';
+export type { TableCell, TableColumn, TableRow } from './laid-columns';
 
 const ruleColours = { hair: paperColours.line, strong: paperColours.ink, gold: paperColours.gold } as const;
 

@@ -1,6 +1,6 @@
 import type { Block, Flow } from './flow';
 import type { Pdf } from './open-paper';
-import { textStyles, type TextStyle } from './paper-look';
+import { textStyles, type TextStyle } from './paper-colours';
 import { textLines, writeLine } from './text-lines';
 
 /** How a text is set on the width of a page, in points. */

@@ -1,5 +1,5 @@
 import type { Pdf } from './open-paper';
-import type { TextStyle } from './paper-look';
+import type { TextStyle } from './paper-colours';
 import { printableText } from './printable-text';
 
 /** Figures all of one width and standing on the line, letters kerned: everywhere, since Alegreya's own figures hang. */

@@ -2,7 +2,7 @@ import type { DrawingPath, DrawingPoint, DrawingView } from '#shared/measure/dra
 import { isUpright, type PlacedDimension } from './dimension-places';
 import type { Figure } from './figure';
 import type { Pdf } from './open-paper';
-import { paperColours, textStyles } from './paper-look';
+import { paperColours, textStyles } from './paper-colours';
 import { textWidth, writeLine } from './text-lines';
 import { besideWidth, tierOffset, viewLayout, type ViewLayout } from './view-layout';
 

@@ -1,5 +1,5 @@
-import { amountOf } from './price-line-rows';
-import type { PricePage } from './price-parts';
+import { amountOf } from './line-rows';
+import type { PricePage } from './price-sources';
 import { sumRow } from './price-sums';
 import { minorOfAmount, roundedAmount, roundedMinor } from './rounded';
 import { formula } from './sheet';

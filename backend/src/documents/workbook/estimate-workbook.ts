@@ -6,7 +6,7 @@ import { extrasSheet } from './extras-sheet';
 import { gildingRates } from './gilding-rates';
 import { gildingSheet } from './gilding-sheet';
 import { goodsRates } from './goods-rates';
-import { leafPages } from './leaf-sheet';
+import { leafPages } from './leaf-pages';
 import { materialsSheet } from './materials-sheet';
 import { moneyRates } from './money-rates';
 import { NameBook } from './name-book';

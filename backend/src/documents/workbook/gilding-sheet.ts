@@ -3,7 +3,7 @@ import type { WorkedZone } from '#shared/estimates/worked-zone';
 import type { StepHours } from '#shared/buildups/step-hours';
 import type { GildingRates } from './gilding-rates';
 import { handsOnFormula } from './hands-on-formula';
-import type { LeafPages } from './leaf-sheet';
+import type { LeafPages } from './leaf-pages';
 import { lotSteps, type NumberedStep } from './lot-steps';
 import { formula, input, Sheet, type CellContent } from './sheet';
 import type { TakeOff } from './take-off-sheet';

@@ -1,6 +1,6 @@
 import type { Material } from '#shared/buildups/buildup-card';
 import type { LeafProduct } from '#shared/leaf/leaf-product';
-import type { ZoneLeaf } from '#shared/leaf/zone-leaf-result';
+import type { ZoneLeaf } from '#shared/leaf/laying';
 import type { RatesSheet } from './rates-sheet';
 import type { WorkbookFacts } from './workbook-facts';
 

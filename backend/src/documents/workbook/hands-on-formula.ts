@@ -2,8 +2,8 @@ import type { BuildUp, BuildUpStep } from '#shared/buildups/buildup';
 import type { WorkedZone } from '#shared/estimates/worked-zone';
 import type { LayingWay } from '#shared/leaf/leaf-card';
 import type { GildingRates } from './gilding-rates';
-import { layingParts } from './leaf-losses';
-import type { LeafPages } from './leaf-sheet';
+import { layingParts } from './gross-formula';
+import type { LeafPages } from './leaf-pages';
 import type { TakeOff } from './take-off-sheet';
 
 /** What the hours of a step are worked from: the zone, the sheets before, the address of its coats. */

@@ -1,9 +1,9 @@
 import { insuredValue } from '#shared/estimates/price/insured-work';
 import { sumMinor } from '#shared/money/sum-minor';
 import { taxNumber } from './tax-number';
-import { priceOfCostFormula } from './price-line-formulas';
-import { amountOf } from './price-line-rows';
-import type { PricePage } from './price-parts';
+import { priceOfCostFormula } from './price-formula';
+import { amountOf } from './line-rows';
+import type { PricePage } from './price-sources';
 import { minorOfAmount, roundedAmount } from './rounded';
 import { formula, type CellContent } from './sheet';
 import type { NumberedLine } from './workbook-facts';

@@ -1,7 +1,7 @@
 import type { NameBook } from './name-book';
 import { amountFormat } from './price-columns';
-import { amountOf } from './price-line-rows';
-import type { PricePage } from './price-parts';
+import { amountOf } from './line-rows';
+import type { PricePage } from './price-sources';
 import { minorOfAmount, roundedAmount, roundedMinor } from './rounded';
 import { formula, type CellContent } from './sheet';
 import { taxRows } from './tax-rows';

@@ -1,6 +1,6 @@
-import type { ContingencyCells } from './price-line-rows';
-import { lineCells } from './price-line-formulas';
-import type { PricePage } from './price-parts';
+import type { ContingencyCells } from './line-rows';
+import { lineCells } from './price-formula';
+import type { PricePage } from './price-sources';
 import { minorOfAmount } from './rounded';
 import { remainderFormula, remainderOf, shareFormula, thresholdFormula, thresholdOf } from './remainder';
 import { formula } from './sheet';

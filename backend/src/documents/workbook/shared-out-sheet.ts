@@ -3,7 +3,7 @@ import { sharesByLine } from '#shared/estimates/price/worked-lines';
 import { minorOf } from '#shared/money/minor-of';
 import { settled } from '#shared/money/settled';
 import { splitByLargestRemainder } from '#shared/money/split-by-largest-remainder';
-import type { LeafPages } from './leaf-sheet';
+import type { LeafPages } from './leaf-pages';
 import type { MaterialsPage } from './materials-sheet';
 import { remainderFormula, remainderOf, shareFormula, thresholdFormula, thresholdOf } from './remainder';
 import { formula, input, Sheet } from './sheet';

@@ -7,6 +7,6 @@ export {
   takesLeaf,
   takesPaintedOrnament,
   takesRecutting,
-} from './build-up-names';
+} from './build-up-groups';
 export { StepChoice } from './step-choice';
 export { stripLayers } from './strip-layers';

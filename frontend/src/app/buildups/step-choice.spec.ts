@@ -1,7 +1,7 @@
 import { inputBinding, outputBinding } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { startBuildUps } from '#shared/buildups/start-buildups';
-import { buildUpGroups, isBurnishedInPart, takesLeaf } from './build-up-names';
+import { buildUpGroups, isBurnishedInPart, takesLeaf } from './build-up-groups';
 import { StepChoice } from './step-choice';
 
 const steps = startBuildUps.buildUps.find(({ id }) => id === 'oil-quick')?.steps ?? [];

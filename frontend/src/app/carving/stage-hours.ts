@@ -1,5 +1,5 @@
 import type { CarvingHoursRow, CarvingWorkKind } from '#shared/carving/carving-result';
-import { gradesTogether } from '#shared/carving/hours-rows';
+import { gradesTogether } from '#shared/carving/hours-of-kinds';
 import type { Triple } from '#shared/units/triple';
 
 /** Something of the rate card with its name. */

@@ -13,7 +13,7 @@ import { dayLength_minutes } from '#shared/drying/day-length-minutes';
 import type { WorkingTime } from '#shared/drying/working-time';
 import { Formats } from '../core/formats/formats';
 import { lotRibbon } from './lot-ribbon';
-import { closedBars, ribbonRow, ribbonTicks } from './ribbon-view';
+import { closedBars, ribbonRow, ribbonTicks } from './ribbon-row';
 import type { WorkedLot } from './worked-lot';
 import { workingParts } from './working-parts';
 

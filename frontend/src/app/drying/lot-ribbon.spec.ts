@@ -1,6 +1,6 @@
 import type { SequenceStep } from '#shared/drying/sequence-step';
 import { lotRibbon } from './lot-ribbon';
-import { closedBars, ribbonRow, ribbonTicks } from './ribbon-view';
+import { closedBars, ribbonRow, ribbonTicks } from './ribbon-row';
 import type { WorkedLot, WorkedTask } from './worked-lot';
 import { closedTimes, workingParts } from './working-parts';
 

@@ -3,7 +3,7 @@ import type { LayPlanBand } from '#shared/leaf/lay-plan';
 import { Formats } from '../core/formats/formats';
 import { ScaleDrawing } from '../ui/drawing/scale-drawing';
 import type { LaidAs } from './laying-names';
-import { type CarvedRow, layPlanDrawn } from './lay-plan-view';
+import { type CarvedRow, layPlanDrawn } from './lay-plan-drawn';
 
 /** A zone laid with leaf, with what its plan is drawn from. */
 export interface LaidZone extends LaidAs {

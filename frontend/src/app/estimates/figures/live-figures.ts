@@ -16,7 +16,7 @@ import type { RateCard } from '#shared/rate-cards/rate-card';
 import { DraftStore } from '../draft/draft-store';
 import { figuresDifference } from './figures-difference';
 import { FIGURES_REPORT } from './figures-report';
-import { drawnBy, type Drawn } from './drawn-risk';
+import { drawnBy, type Drawn } from './drawn';
 import { RISK_STARTER } from './risk-starter';
 
 /** What somebody may see of the figures: work, work and prices, or everything. */

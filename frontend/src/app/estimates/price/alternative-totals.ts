@@ -6,7 +6,7 @@ import { type EstimateInput, estimateFigures, prepareEstimate } from '#shared/es
 import type { Figures } from '#shared/estimates/figures';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { EstimateStore } from '../estimate-store';
-import { drawnBy } from '../figures/drawn-risk';
+import { drawnBy } from '../figures/drawn';
 import { RISK_STARTER } from '../figures/risk-starter';
 import type { WorkerStarter } from '../../core/workers/worker-token';
 

@@ -8,8 +8,8 @@ import {
   overheadFormula,
   ownPriceFormula,
   priceFormula,
-} from './price-line-formulas';
-import type { PricePage } from './price-parts';
+} from './price-formula';
+import type { PricePage } from './price-sources';
 import { formula, type CellContent } from './sheet';
 import type { NumberedLine } from './workbook-facts';
 

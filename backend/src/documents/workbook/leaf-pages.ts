@@ -1,6 +1,6 @@
-import type { ZoneLeaf } from '#shared/leaf/zone-leaf-result';
+import type { ZoneLeaf } from '#shared/leaf/laying';
 import type { GoodsRates, LossRates } from './goods-rates';
-import { grossFormula } from './leaf-losses';
+import { grossFormula } from './gross-formula';
 import { leafProducts } from './leaf-products';
 import { settledFormula } from './rounded';
 import { formula, input, Sheet } from './sheet';

@@ -1,5 +1,5 @@
 import type { Pdf } from './open-paper';
-import { textStyles, type TextStyle } from './paper-look';
+import { textStyles, type TextStyle } from './paper-colours';
 import { textLines, textWidth } from './text-lines';
 import { printableText } from './printable-text';
 

@@ -1,7 +1,7 @@
 import type { Alternative } from '#shared/estimates/settings';
 import type { Block } from '../paper/flow';
 import type { Pdf } from '../paper/open-paper';
-import { textStyles } from '../paper/paper-look';
+import { textStyles } from '../paper/paper-colours';
 import { sectionBlocks } from '../paper/section-blocks';
 import { tableBlock, type TableRow } from '../paper/table-block';
 import { textBlock } from '../paper/text-block';

@@ -1,5 +1,5 @@
 import type { LayPlanBand } from '#shared/leaf/lay-plan';
-import { layPlanDrawn } from './lay-plan-view';
+import { layPlanDrawn } from './lay-plan-drawn';
 
 const strips = (height_mm: number, strip_mm: number): LayPlanBand => ({
   length_mm: 2860,

@@ -1,6 +1,6 @@
 import type { LineWork } from '#shared/estimates/price/line-work';
 import type { NumberedLine } from './workbook-facts';
-import type { PricePage } from './price-parts';
+import type { PricePage } from './price-sources';
 import { roundedAmount, settledFormula } from './rounded';
 
 /** Hours as they enter money: to six decimals, floating point settled before. */

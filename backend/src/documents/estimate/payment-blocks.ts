@@ -1,7 +1,7 @@
 import { type PaymentRow, paymentRows } from '#shared/documents/payment-rows';
 import type { Block } from '../paper/flow';
 import type { Pdf } from '../paper/open-paper';
-import { textStyles } from '../paper/paper-look';
+import { textStyles } from '../paper/paper-colours';
 import { sectionBlocks } from '../paper/section-blocks';
 import { tableBlock, type TableColumn, type TableRow } from '../paper/table-block';
 import { textBlock } from '../paper/text-block';
