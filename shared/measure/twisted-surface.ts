@@ -35,10 +35,17 @@ export function twistedSurface(shape: TwistedShape): Surface {
 const turnWithin = (radius: number, rise: number) =>
   Math.PI * (radius * Math.hypot(radius, rise) + (rise === 0 ? 0 : rise * rise * Math.asinh(radius / rise)));
 
+// The difference of two nearly equal turns would lose its last digits, so a narrow thread is integrated directly.
+function turnBetween(core_mm: number, edge_mm: number, rise: number): number {
+  const isNarrow = edge_mm - core_mm < edge_mm * 1e-2;
+  if (!isNarrow) return turnWithin(edge_mm, rise) - turnWithin(core_mm, rise);
+  return gaussLegendre((radius) => 2 * Math.PI * Math.hypot(radius, rise), [core_mm, edge_mm], 8);
+}
+
 /** One face of a helicoid between its core and its edge, in mm². */
 export function helicoidSurface({ radius_mm, coreRadius_mm, risePerTurn_mm, turns }: HelicoidShape): Surface {
   const rise = risePerTurn_mm / (2 * Math.PI);
-  const turn_mm2 = turnWithin(radius_mm, rise) - turnWithin(coreRadius_mm, rise);
+  const turn_mm2 = turnBetween(coreRadius_mm, radius_mm, rise);
   return madeSurface({
     area_mm2: turns * turn_mm2,
     laying: 'patches',
