@@ -29,6 +29,7 @@ const price: NamedPrice = {
     line('leg/carving', 'leg', { price_minor: 400 }),
   ],
   costs: [costOf('apron/carving', 4, 250), costOf('apron/gilding', 2, 150), costOf('leg/carving', 6, 330)],
+  memberOrder: ['apron', 'leg'],
   memberName: (id) => ({ apron: 'Apron', leg: 'Leg' })[id ?? ''] ?? 'The whole',
   kindName: (kind) => kind,
 };

@@ -26,6 +26,8 @@ export interface NamedPrice {
   readonly lines: readonly PriceLine[];
   readonly costs: PriceCost['lines'] | undefined;
   readonly memberName: (memberId: string | null) => string;
+  /** The members in working order, in which their lines stand. */
+  readonly memberOrder: readonly string[];
   readonly kindName: (kind: WorkKind) => string;
 }
 
@@ -45,8 +47,11 @@ const added = (costs: readonly RowCost[]): RowCost => ({
   cost_minor: sumMinor(costs.map((cost) => cost.cost_minor)),
 });
 
-function byMember({ lines, memberName, kindName }: NamedPrice): Section[] {
-  return sectionsByMember(lines).map(({ key, ...section }) => ({
+function byMember({ lines, memberName, memberOrder, kindName }: NamedPrice): Section[] {
+  const place = new Map<string | null, number>(memberOrder.map((id, index) => [id, index]));
+  const placeOf = ({ key }: { key: string | null }) => place.get(key) ?? memberOrder.length;
+  const sections = sectionsByMember(lines).toSorted((one, other) => placeOf(one) - placeOf(other));
+  return sections.map(({ key, ...section }) => ({
     ...section,
     id: key ?? 'whole',
     name: memberName(key),

@@ -55,6 +55,7 @@ export class PriceLines {
         lines: this.price().lines,
         costs: this.cost()?.lines,
         memberName: this.names.memberOf(this.memberNames()),
+        memberOrder: [...this.memberNames().keys()],
         kindName: (kind) => this.names.kind(kind),
       },
       this.presentation(),
