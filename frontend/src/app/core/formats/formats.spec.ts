@@ -26,6 +26,8 @@ describe('Formats', () => {
     expect(plain(formats.otherLength(860.425))).toBe('33 7/8 in');
     signIn(['owner'], { lengthUnit: 'in' });
     expect(plain(formats.otherLength(25.4))).toBe('25.4 mm');
+    expect(plain(formats.otherLength(25.4, '1 in'))).toBe('25.4 mm');
+    expect(plain(formats.otherLength(25.4, '2.54 cm'))).toBe('1 in');
   });
 
   it('writes days and times in the time zone of the workshop, not of the browser', () => {

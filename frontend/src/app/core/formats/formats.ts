@@ -83,9 +83,10 @@ export class Formats {
     return Number.isFinite(figure) ? formatDecimal(String(figure), this.locale()) : '';
   }
 
-  /** A length in the unit the workshop does not use, for a reading marked ≈ beside the typed one. */
-  otherLength(length_mm: number): string {
-    return formatLength(length_mm, this.lengthUnit() === 'mm' ? 'in' : 'mm', this.locale()).replace('≈ ', '');
+  /** A length in the unit it was not typed in (the workshop’s own where the text names none), for a reading marked ≈ beside it. */
+  otherLength(length_mm: number, typed = ''): string {
+    const isInches = /["″”'′’]|\b(in|ft)\b/i.test(typed) || (this.lengthUnit() === 'in' && !/m\s*$/i.test(typed));
+    return formatLength(length_mm, isInches ? 'mm' : 'in', this.locale()).replace('≈ ', '');
   }
 
   /** A day (2026-06-04) in words. */

@@ -29,7 +29,7 @@ export class LengthField extends TypedEntry<TypedLength> {
   readonly unitText = computed(() => (/[a-z'"′″’”]/i.test(this.text()) ? '' : this.formats.lengthUnit()));
   override readonly otherReading = computed(() => {
     const known = this.known_mm();
-    return known === undefined ? '' : this.formats.otherLength(known);
+    return known === undefined ? '' : this.formats.otherLength(known, this.text());
   });
 
   override writeValue(value: TypedLength | null): void {
