@@ -1,5 +1,6 @@
 import * as z from 'zod';
 import type { EstimateSettings, ExtraLine } from '#shared/estimates/settings';
+import { cumulativePercents } from '#shared/money/cumulative-parts';
 import { complain } from '#shared/problems/complaints-of';
 import { cardItemId, decimalEntry, percentEntry } from '#shared/problems/card-entry-schema';
 import { identifier, line, optionalLine, paragraphs } from '#shared/problems/entry-schema';
@@ -64,20 +65,19 @@ const discountSchema = z
     path: ['amount'],
   });
 
+/** Exactly, as the payments are worked: a sum of floats would let a hair through. */
+const isWhole = (parts: readonly { readonly percent: number }[]): boolean =>
+  cumulativePercents(parts.map(({ percent }) => percent))
+    .at(-1)
+    ?.equals(100) ?? false;
+
 const stagesSchema = z
   .strictObject({
     deposit_percent: percentEntry,
     parts: z.array(z.strictObject({ id: identifier, name: line(80), percent: percentEntry })).max(24),
     retention_percent: percentEntry,
   })
-  .refine(
-    (stages) =>
-      stages.parts.length === 0 || Math.abs(stages.parts.reduce((sum, part) => sum + part.percent, 0) - 100) < 1e-9,
-    {
-      ...complain('stages-not-whole'),
-      path: ['parts'],
-    },
-  )
+  .refine(({ parts }) => parts.length === 0 || isWhole(parts), { ...complain('stages-not-whole'), path: ['parts'] })
   .refine((stages) => stages.deposit_percent + stages.retention_percent <= 100, {
     ...complain('stages-withhold-too-much'),
     path: ['retention_percent'],

@@ -197,6 +197,8 @@ export class EstimateStore {
 
   private take(read: ReadEstimate): void {
     const { id, number, version, rateCardId, currency } = read;
+    // Nothing is worked on the old card any more; the new one is on its way.
+    if (this.known()?.rateCardId !== rateCardId) this.live.workWith(undefined);
     this.known.set({ id, number, version, rateCardId, currency });
     this.rows.read(read);
     this.live.show(read.figures);

@@ -20,7 +20,8 @@ export class PlaceExplanation {
     effect(() => {
       const next = explained();
       untracked(() => {
-        if (next?.id === shown) return;
+        // Worked anew it explains itself with its new figures, unless something else is being explained.
+        if (next?.id === shown) return next && this.explanation.isOf(next.id) ? this.explanation.show(next) : undefined;
         shown = next?.id;
         if (next && matchMedia('(min-width: 1181px)').matches) this.explanation.show(next);
         else this.explanation.close();

@@ -1,4 +1,5 @@
 import type { ExtraLine } from '#shared/estimates/settings';
+import { D } from '#shared/money/decimal';
 import { formatDecimal } from '#shared/units/format-decimal';
 import type { Formats } from '../../core/formats/formats';
 import type { FigureColumn } from '../../ui/table/figure-column';
@@ -39,9 +40,15 @@ function unitOf(line: ExtraLine): string {
   }
 }
 
-function typedText(value: string | number | null, locale: string): string {
-  if (value === null) return '';
-  return formatDecimal(String(value), locale);
+/** A price has at least the decimals of the currency; nothing of what was entered is rounded away. */
+function rateText(rate: string, digits: number): string {
+  const price = new D(rate);
+  return price.decimalPlaces() < digits ? price.toFixed(digits) : rate;
+}
+
+function typedText(value: string | number, key: ExtraCell, formats: Formats): string {
+  const text = key === 'rate' ? rateText(String(value), formats.currencyDigits()) : String(value);
+  return formatDecimal(text, formats.locale());
 }
 
 function cellColumn(key: ExtraCell, heading: string, formats: Formats): Column {
@@ -52,7 +59,8 @@ function cellColumn(key: ExtraCell, heading: string, formats: Formats): Column {
     editable: true,
     text: ({ line, wrong }) => {
       const value = cellValue(line, key);
-      return wrong[key]?.text ?? (key === 'name' ? line.name : typedText(value, formats.locale()));
+      const kept = value === null || key === 'name' ? (value ?? '') : typedText(value, key, formats);
+      return wrong[key]?.text ?? String(kept);
     },
     remark: ({ wrong }) => wrong[key]?.remark ?? '',
   };

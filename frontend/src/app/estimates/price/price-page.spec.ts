@@ -3,6 +3,8 @@ import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
 import { ActivatedRoute, convertToParamMap, provideRouter } from '@angular/router';
 import { of } from 'rxjs';
+import { startCard } from '#shared/rate-cards/start-card';
+import type { RateCard } from '#shared/rate-cards/rate-card';
 import type { Role } from '#shared/actor/role';
 import { EstimateServer, ids, workspaceOn } from '../../../test/estimate-server';
 import { signIn, words } from '../../../test/sign-in';
@@ -90,7 +92,10 @@ describe('PricePage', () => {
     jest.useFakeTimers();
     server = new EstimateServer();
   });
-  afterEach(() => jest.useRealTimers());
+  afterEach(() => {
+    jest.restoreAllMocks();
+    jest.useRealTimers();
+  });
 
   describe('shows the lines', () => {
     it('with their cost to whoever works the estimate, each price explained', async () => {
@@ -135,6 +140,19 @@ describe('PricePage', () => {
       expect(amounts.reduce((sum, amount) => sum + amount, 0)).toBe(store.priced()?.price.net_minor);
       expect(element().querySelectorAll('app-money-bar rect')).toHaveLength(rows.length);
     });
+  });
+
+  it('explains itself anew as soon as its figures move', async () => {
+    const match = matchMedia;
+    const wide = (media: string) => ({ ...match(media), matches: media.includes('min-width') });
+    jest.spyOn(globalThis, 'matchMedia').mockImplementation(wide);
+    await open();
+    const heading = () => spoken(element().querySelector('app-reason-panel h4'));
+    const before = heading();
+    store.changeMember(ids.leg, { ...memberContent(ids.edge), count: 3 });
+    await settle();
+    expect(before).toMatch(/profit, because$/);
+    expect(heading()).not.toBe(before);
   });
 
   describe('takes profit', () => {
@@ -324,20 +342,44 @@ describe('PricePage', () => {
     });
   });
 
-  it('names the card it is worked on, and leaves it where it is in force', async () => {
-    await open('card');
-    const card = { id: ids.card, version: 1, name: 'Spring', state: 'in-force', from: '2026-03-01' };
-    http
-      .expectOne(({ url }) => url.startsWith('/api/rate-cards'))
-      .flush({
-        items: [{ ...card, basedOnId: null, changedAt: '2026-03-01T08:00:00.000Z' }],
-        next: null,
-        count: 1,
-        countIsExact: true,
-      });
-    await settle();
-    expect(spoken(element().querySelector('app-card-part'))).toContain('Spring”, in force from 1 Mar 2026');
-    expect(spoken(element().querySelector('app-card-part'))).toContain('It is the card in force.');
+  describe('works on a rate card', () => {
+    const spring = {
+      ...{ id: ids.card, version: 1, name: 'Spring', state: 'in-force', from: '2026-03-01' },
+      ...{ basedOnId: null, changedAt: '2026-03-01T08:00:00.000Z' },
+    };
+    const autumn = { ...spring, id: ids.piece, name: 'Autumn', from: '2026-09-01' };
+    const dearer: RateCard = {
+      ...startCard,
+      money: { ...startCard.money, grades: startCard.money.grades.map((grade) => ({ ...grade, costPerHour: '60' })) },
+    };
+    const list = async (items: readonly object[]) => {
+      const asked = http.expectOne(({ url }) => url.startsWith('/api/rate-cards?') || url === '/api/rate-cards');
+      asked.flush({ items, next: null, count: items.length, countIsExact: true });
+      await settle();
+    };
+
+    it('names it, and leaves it where it is in force', async () => {
+      await open('card');
+      await list([spring]);
+      expect(spoken(element().querySelector('app-card-part'))).toContain('Spring”, in force from 1 Mar 2026');
+      expect(spoken(element().querySelector('app-card-part'))).toContain('It is the card in force.');
+    });
+
+    it('shows what a newer one in force would change, line by line, before it is taken', async () => {
+      await open('card');
+      await list([autumn, { ...spring, state: 'past' }]);
+      button('See what it changes').click();
+      await settle();
+      http.expectOne(`/api/rate-cards/${ids.piece}`).flush({ ...autumn, content: dearer });
+      await settle();
+      const part = spoken(element().querySelector('app-card-part'));
+      expect(part).toContain('5 lines of the card differ');
+      expect(part).toContain('Top edge, Ground');
+      const taken = jest.spyOn(store, 'takeCard').mockResolvedValue();
+      button('Take the card in force').click();
+      await settle();
+      expect(taken).toHaveBeenCalledTimes(1);
+    });
   });
 
   function memberContent(id: string) {
