@@ -1,3 +1,4 @@
+import { Op } from 'sequelize';
 import type { IssueState, Paper } from '#shared/estimates/issue-schema';
 import type { Database } from '../platform/database/database';
 import { WorkshopRows } from '../platform/database/workshop-rows';
@@ -21,13 +22,10 @@ export class IssueRepository {
     return this.issues.list(workshopId, { where: { estimateId }, order: [['sequence', 'DESC']] });
   }
 
-  async newest(
-    workshopId: string,
-    estimateId: string,
-    before = Number.MAX_SAFE_INTEGER,
-  ): Promise<IssueRow | undefined> {
-    const all = await this.ofEstimate(workshopId, estimateId);
-    return all.find((issue) => issue.sequence < before);
+  async newest(workshopId: string, estimateId: string, before = 1_000_000): Promise<IssueRow | undefined> {
+    const where = { estimateId, sequence: { [Op.lt]: before } };
+    const [row] = await this.issues.list(workshopId, { where, order: [['sequence', 'DESC']], limit: 1 });
+    return row;
   }
 
   get(workshopId: string, id: string): Promise<IssueRow> {
