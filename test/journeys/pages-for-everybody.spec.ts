@@ -57,7 +57,7 @@ describe.each(screens)('%s', (name, screen) => {
       '/people',
       '/workshop',
       '/profile',
-      '/nowhere',
+      '/people/nowhere',
     ];
     const found: Record<string, readonly string[]> = {};
     for (const path of [...paths, ...places.map((place) => `${estimate}/${place}`)]) {
