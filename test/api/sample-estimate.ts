@@ -1,10 +1,8 @@
-import { randomInt } from 'node:crypto';
 import { v7 as newId } from 'uuid';
 import { beginEstimate, changeEstimate } from '#shared/estimates/estimates-endpoints';
 import type { Change } from '#shared/estimates/change-schema';
 import type { MemberContent, MemberOrnament, Zone } from '#shared/estimates/member';
-import { keepClient } from '#shared/jobs/clients-endpoints';
-import { keepJob } from '#shared/jobs/jobs-endpoints';
+import { sampleJob } from './sample-job';
 import type { TestWorkshop } from './start-api';
 
 const sampleZone = (id: string): Zone => ({
@@ -63,20 +61,6 @@ export interface SampleEstimate {
 async function done(call: PromiseLike<{ status: number; text: string }>): Promise<void> {
   const response = await call;
   if (response.status >= 300) throw new Error(`the sample could not be made: ${response.status} ${response.text}`);
-}
-
-/** A job of a client, in the workshop's name. */
-export async function sampleJob(workshop: TestWorkshop): Promise<string> {
-  const { visitor } = workshop.people.owner;
-  const [clientId, jobId] = [newId(), newId()];
-  const client = {
-    ...{ name: `${workshop.mark} client ${randomInt(1e6)}`, kind: 'firm', contact: '', email: '', telephone: '' },
-    ...{ address: `${workshop.mark} quay`, website: '', taxRegistration: '', note: '' },
-  };
-  await done(visitor.call(keepClient, { params: { clientId }, version: 0, body: client }));
-  const job = { title: `${workshop.mark} base`, clientId, kind: 'new', reference: '', site: '', note: '' };
-  await done(visitor.call(keepJob, { params: { jobId }, version: 0, body: job }));
-  return jobId;
 }
 
 /** The changes that enter one piece with one member. */

@@ -1,5 +1,5 @@
 import { listJobs } from '#shared/jobs/jobs-endpoints';
-import { sampleJob } from '../api/sample-estimate';
+import { sampleJob } from '../api/sample-job';
 import type { Api, TestWorkshop } from '../api/start-api';
 import type { Benchmark, Measure } from './benchmark';
 import { withApi } from './served-api';

@@ -11,8 +11,4 @@ export class EstimateRepository extends WorkshopRows<EstimateRow> {
   ofJob(workshopId: string, jobId: string): Promise<EstimateRow[]> {
     return this.list(workshopId, { where: { jobId } });
   }
-
-  onCard(workshopId: string, rateCardId: string): Promise<EstimateRow[]> {
-    return this.list(workshopId, { where: { rateCardId } });
-  }
 }

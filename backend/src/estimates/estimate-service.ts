@@ -113,8 +113,9 @@ export class EstimateService {
   async change(actor: Actor, id: string, changes: readonly Change[]): Promise<KeptChanges> {
     const { workshopId } = actor;
     await this.parts.estimates.lock(workshopId, id);
-    const plan = changePlan(changes, await this.whole(workshopId, id));
-    const { estimate } = await this.whole(workshopId, id);
+    const before = await this.whole(workshopId, id);
+    const { estimate } = before;
+    const plan = changePlan(changes, before);
     await this.parts.changes.apply(actor, estimate, plan);
     const settings = plan.find(({ change }) => change.kind === 'settings');
     if (plan.length > 0)

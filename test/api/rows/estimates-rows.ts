@@ -2,7 +2,8 @@ import { randomUUID } from 'node:crypto';
 import { v7 as newId } from 'uuid';
 import { issueEstimate } from '#shared/estimates/issues-endpoints';
 import type { MatrixRows } from '../matrix-row';
-import { sampleEstimate, sampleJob, type SampleEstimate } from '../sample-estimate';
+import { sampleEstimate, type SampleEstimate } from '../sample-estimate';
+import { sampleJob } from '../sample-job';
 import type { Api, TestWorkshop } from '../start-api';
 
 const oneEstimate = async (workshop: TestWorkshop) => {
