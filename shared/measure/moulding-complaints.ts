@@ -1,4 +1,5 @@
-import type { MouldingPlan, MouldingShape } from '#shared/measure/moulding-shape';
+import type { MouldingPlan, MouldingShape, PolygonPlan } from '#shared/measure/moulding-shape';
+import { sideTooLong } from '#shared/measure/plan-closure';
 import { planRun, sidesAt } from '#shared/measure/plan-run';
 import { profileComplaints } from '#shared/measure/profile-complaints';
 import { profileCurve } from '#shared/measure/profile-curve';
@@ -17,12 +18,19 @@ function planComplaints(plan: MouldingPlan): Complaint[] {
     const limit = 2 * plan.sides_mm.length;
     return plan.returns_mm.length > limit ? [complaint('returns_mm', 'shape-returns-many', { limit })] : [];
   }
-  if (plan.form !== 'polygon') return [];
+  return plan.form === 'polygon' ? polygonComplaints(plan) : [];
+}
+
+function polygonComplaints(plan: PolygonPlan): Complaint[] {
   const needed = plan.closed ? plan.sides_mm.length : plan.sides_mm.length - 1;
   if (plan.turns_degrees.length !== needed) return [complaint('turns_degrees', 'shape-turns-count', { needed })];
   const sum = plan.turns_degrees.reduce((turned, turn) => turned + turn, 0);
   // Half a degree forgives angles read off a bevel; a plan that closes turns once round.
-  return plan.closed && Math.abs(sum - 360) > 0.5 ? [complaint('turns_degrees', 'shape-turns-sum', { sum })] : [];
+  if (plan.closed && Math.abs(sum - 360) > 0.5) return [complaint('turns_degrees', 'shape-turns-sum', { sum })];
+  const longest_mm = plan.closed ? sideTooLong(plan.sides_mm) : undefined;
+  if (longest_mm === undefined) return [];
+  const others_mm = plan.sides_mm.reduce((all, side_mm) => all + side_mm, 0) - longest_mm;
+  return [complaint('sides_mm', 'shape-sides-cannot-close', { longest_mm, others_mm })];
 }
 
 // The tightest curve of an oval, at the ends of its longer axis, has radius b²/a.

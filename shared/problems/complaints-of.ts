@@ -9,18 +9,25 @@ export const complain = (code: WordCode, values: WordValues = {}) => ({ params: 
 
 const plain = (code: WordCode, values: WordValues = {}): Pick<Complaint, 'code' | 'values'> => ({ code, values });
 
+/** The unit an entry is in, by the ending of its name: what stands in a list of `sides_mm` is in mm too. */
+function inUnitOf(path: readonly PropertyKey[], name: 'minimum' | 'maximum', limit: number): WordValues {
+  const entry = path.findLast((part) => typeof part === 'string') ?? '';
+  const unit = /_[a-zµ0-9]+$/.exec(String(entry))?.[0] ?? '';
+  return { [`${name}${unit}`]: limit };
+}
+
 function tooSmall(issue: Extract<Issue, { code: 'too_small' }>) {
   const minimum = Number(issue.minimum);
   if (issue.origin === 'string') return minimum === 1 ? plain('entry-missing') : plain('entry-too-short', { minimum });
   if (issue.origin === 'array') return plain('entry-too-few', { minimum });
-  return issue.inclusive ? plain('entry-too-small', { minimum }) : plain('entry-not-above', { minimum });
+  return plain(issue.inclusive ? 'entry-too-small' : 'entry-not-above', inUnitOf(issue.path, 'minimum', minimum));
 }
 
 function tooBig(issue: Extract<Issue, { code: 'too_big' }>) {
   const maximum = Number(issue.maximum);
   if (issue.origin === 'string') return plain('entry-too-long', { maximum });
   if (issue.origin === 'array') return plain('entry-too-many', { maximum });
-  return issue.inclusive ? plain('entry-too-large', { maximum }) : plain('entry-not-below', { maximum });
+  return plain(issue.inclusive ? 'entry-too-large' : 'entry-not-below', inUnitOf(issue.path, 'maximum', maximum));
 }
 
 function worded(issue: Issue): Pick<Complaint, 'code' | 'values'> {

@@ -1,7 +1,7 @@
 import { parseArea } from '#shared/units/parse-area';
 
 describe('parseArea', () => {
-  const reading = { unit: 'mm', decimalSign: '.' } as const;
+  const reading = { unit: 'mm', locale: 'en-GB' } as const;
 
   it.each([
     ['a bare figure is in square centimetres', '1200', 120_000],
@@ -15,12 +15,17 @@ describe('parseArea', () => {
   });
 
   it('takes a bare figure for square inches where one measures in inches', () => {
-    expect(parseArea('2', { unit: 'in', decimalSign: '.' })).toEqual({ ok: true, mm2: 1290.32 });
+    expect(parseArea('2', { unit: 'in', locale: 'en-GB' })).toEqual({ ok: true, mm2: 1290.32 });
   });
 
   it('knows the decimal sign of the reader alone', () => {
-    expect(parseArea('0,5 m²', { unit: 'mm', decimalSign: ',' })).toEqual({ ok: true, mm2: 500_000 });
-    expect(parseArea('1,200 cm²', reading)).toMatchObject({ ok: false, code: 'number-grouped' });
+    expect(parseArea('0,5 m²', { unit: 'mm', locale: 'de-DE' })).toEqual({ ok: true, mm2: 500_000 });
+    expect(parseArea('0,5 m²', reading)).toMatchObject({ ok: false, code: 'number-grouped' });
+  });
+
+  it('takes grouped digits with their unit, as a page shows them, and refuses them bare, where they may mean two things', () => {
+    expect(parseArea('12,345.6 cm²', reading)).toEqual({ ok: true, mm2: 1_234_560 });
+    expect(parseArea('1,200', reading)).toMatchObject({ ok: false, code: 'number-grouped' });
   });
 
   it.each([

@@ -1,12 +1,14 @@
 import { D } from '#shared/money/decimal';
+import { decimalSign } from '#shared/units/decimal-sign';
 import type { LengthUnit } from '#shared/units/length-unit';
+import { ungrouped } from '#shared/units/ungrouped';
 import { looksGrouped, plainDecimal } from '#shared/units/parse-number';
 import { type Parsed, unread } from '#shared/units/parsed';
 
-/** The unit a bare figure is meant in (cm² where one measures in mm, in² otherwise), and the reader's decimal sign. */
+/** The unit a bare figure is meant in (cm² where one measures in mm, in² otherwise), and the reader's locale. */
 export interface AreaReading {
   readonly unit: LengthUnit;
-  readonly decimalSign: string;
+  readonly locale: string;
 }
 
 const squareMillimetresPer: Readonly<Record<string, string>> = {
@@ -21,17 +23,18 @@ const squareMillimetresPer: Readonly<Record<string, string>> = {
 const written = /^(.*?)\s*(?:(?:sq\.?\s*)?(mm|cm|dm|m|in|ft)\s*(?:²|\^?2)?)?$/i;
 
 /**
- * Reads a typed area: 1200 cm², 0.12 m2, 186 sq in, 1.3 ft². Only the decimal sign of the locale counts and grouping is refused. Gives mm²,
- * or a complaint; the inch is 25.4 mm exactly.
+ * Reads a typed area: 1200 cm², 0.12 m2, 186 sq in, 1.3 ft². Only the decimal sign of the locale counts; grouped digits are taken where
+ * their unit stands behind them, as a page writes them, and refused bare. Gives mm², or a complaint; the inch is 25.4 mm exactly.
  */
-export function parseArea(text: string, { unit, decimalSign }: AreaReading): Parsed<{ mm2: number }> {
+export function parseArea(text: string, { unit, locale }: AreaReading): Parsed<{ mm2: number }> {
   const plain = text.trim();
+  const sign = decimalSign(locale);
   if (plain === '') return unread('entry-missing');
   const [, figure = plain, named] = written.exec(plain) ?? [];
-  const decimal = plainDecimal(figure.trim(), decimalSign);
+  const decimal = plainDecimal(named ? ungrouped(figure.trim(), locale) : figure.trim(), sign);
   if (decimal === null)
     return looksGrouped(figure)
-      ? unread('number-grouped', { sign: decimalSign })
+      ? unread('number-grouped', { sign })
       : unread('area-unclear', { example: unit === 'in' ? '186 in²' : '1200 cm²' });
   const factor = squareMillimetresPer[named?.toLowerCase() ?? (unit === 'in' ? 'in' : 'cm')];
   return { ok: true, mm2: new D(decimal).times(factor).toNumber() };

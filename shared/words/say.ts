@@ -26,11 +26,13 @@ function written(values: WordValues, formats: ValueFormats): Record<string, stri
   for (const [name, value] of Object.entries(values)) {
     const unit = unitOf(name);
     out[name] = typeof value === 'number' && unit ? formats.write(unit, value) : value;
+    // A message for limits of every kind says `{maximum}`; the unit comes with the value.
+    if (unit) out[name.slice(0, -unit.length - 1)] ??= out[name];
   }
   return out;
 }
 
-/** Words a code with its values in a language and a reader's formats; a value named `girth_mm` is written as a length, and so on. */
+/** Words a code with its values in a language and a reader's formats; a value named `girth_mm` is written as a length, and so on; its message may call it `girth`. */
 export function say(catalogue: Catalogue, formats: ValueFormats): (code: WordCode, values?: WordValues) => string {
   return (code, values = {}) => String(messageFor(catalogue[code], formats.locale).format(written(values, formats)));
 }

@@ -49,6 +49,10 @@ export const measure = {
   'shape-turns-count':
     'This plan needs {needed, plural, =0 {no mitre angle} one {# mitre angle} other {# mitre angles}}.',
   'shape-turns-sum': 'A plan that closes turns through 360° in all; these mitres turn through {sum}°.',
+  'shape-sides-cannot-close':
+    'The side of {longest_mm} is too long to close this plan: the others come to {others_mm} together.',
+  'shape-plan-gap':
+    'With these turns the last side ends {gap_mm} away from where the first one begins. Measure again, or leave the plan open.',
   'shape-plan-too-tight':
     'The profile is too deep for this plan: a side or a curve would shrink to nothing. Check the lengths and the edge they were measured at.',
   'shape-turned-past-axis': 'The profile runs through the axis. Start from a larger radius, or step in less.',

@@ -107,7 +107,7 @@ describe('MeasurePage', () => {
     await open();
     await type('Length', '2000 mm');
     await type('Length', '2000 m');
-    expect(complaints()).toEqual(['Must be less than 100000.']);
+    expect(complaints()).toEqual(['Must be less than 100000 mm.']);
     expect(surface()).toBe('1,200 cm²');
   });
 

@@ -1,6 +1,8 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import type { MouldingPlan, PolygonPlan } from '#shared/measure/moulding-shape';
+import { planClosure } from '#shared/measure/plan-closure';
 import type { AnyDocumentForm } from '../core/forms/document-form';
+import { Words } from '../core/formats/words';
 import { EntryAt } from '../ui/field/entry-at';
 import { ChoiceEntry } from './choice-entry';
 import { RowsEditor } from './rows-editor';
@@ -34,9 +36,16 @@ const starts: Readonly<Record<PlanForm, (sides_mm: readonly number[]) => Mouldin
     .complaint {
       color: var(--wrong);
     }
+
+    .remark {
+      color: var(--warn);
+      font-size: 0.9375rem;
+    }
   `,
 })
 export class PlanEditor {
+  private readonly words = inject(Words);
+
   readonly form = input.required<AnyDocumentForm>();
   /** Where the moulding stands in the document. */
   readonly path = input.required<string>();
@@ -44,6 +53,14 @@ export class PlanEditor {
 
   protected readonly plan = computed(() => this.form().value<MouldingPlan>(`${this.path()}.plan`));
   protected readonly complaint = computed(() => this.form().message(`${this.path()}.plan`));
+  /** That the sides miss each other, where they are said to meet; the figures stand all the same. */
+  protected readonly gap = computed(() => {
+    const plan = this.plan();
+    if (plan?.form !== 'polygon' || !plan.closed || this.form().message(this.at('sides_mm'))) return '';
+    const { gap_mm, isOpen } = planClosure(plan);
+    const isKnown = !this.form().message(this.at('turns_degrees')) && Number.isFinite(gap_mm);
+    return isKnown && isOpen ? this.words.say('shape-plan-gap', { gap_mm }) : '';
+  });
   protected readonly forms = [
     { value: 'straight', label: $localize`straight lengths, with returns` },
     { value: 'polygon', label: $localize`sides meeting in mitres` },

@@ -59,18 +59,17 @@ export class OrnamentCells {
     return parsed.ok ? parsed.value : Number.NaN;
   }
 
-  private reading() {
-    return { unit: this.formats.lengthUnit(), decimalSign: decimalSign(this.formats.locale()) };
-  }
-
   private length(shown: string) {
     const text = shown.replace(/^≈\s*/, '');
-    const parsed = parseLength(text, this.reading());
+    const parsed = parseLength(text, {
+      unit: this.formats.lengthUnit(),
+      decimalSign: decimalSign(this.formats.locale()),
+    });
     return { text, mm: parsed.ok ? parsed.mm : Number.NaN };
   }
 
   private area(text: string) {
-    const parsed = parseArea(text, this.reading());
+    const parsed = parseArea(text, { unit: this.formats.lengthUnit(), locale: this.formats.locale() });
     return { text, mm2: parsed.ok ? parsed.mm2 : Number.NaN };
   }
 }

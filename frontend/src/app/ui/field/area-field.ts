@@ -1,6 +1,5 @@
 import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { NG_VALUE_ACCESSOR } from '@angular/forms';
-import { decimalSign } from '#shared/units/decimal-sign';
 import { parseArea } from '#shared/units/parse-area';
 import type { AreaEntry } from '../../core/forms/typed-measure';
 import { Entry } from './entry';
@@ -20,8 +19,7 @@ export class AreaField extends TypedEntry<AreaEntry> {
   readonly unitText = (): string => '';
 
   protected override read(text: string): ReadEntry<AreaEntry> {
-    const unit = this.formats.lengthUnit();
-    const parsed = parseArea(text, { unit, decimalSign: decimalSign(this.formats.locale()) });
+    const parsed = parseArea(text, { unit: this.formats.lengthUnit(), locale: this.formats.locale() });
     return parsed.ok ? { ok: true, value: { text, mm2: parsed.mm2 } } : parsed;
   }
 

@@ -13,6 +13,7 @@ import {
   signal,
 } from '@angular/core';
 import { decimalSign } from '#shared/units/decimal-sign';
+import { ungrouped } from '#shared/units/ungrouped';
 import { Formats } from '../../core/formats/formats';
 import { Figure } from '../figure/figure';
 import type { EditedCell, FigureColumn, PastedCells } from './figure-column';
@@ -126,7 +127,8 @@ export class FigureTable<Row> {
   /** Hands out what differs from what stands there. */
   protected take(text: string): void {
     const { line, column } = this.at();
-    if (line && column && text !== column.text(line.row)) this.edited.emit({ rowId: line.id, key: column.key, text });
+    if (line && column && text !== this.typed(column, line.row))
+      this.edited.emit({ rowId: line.id, key: column.key, text });
   }
 
   protected edit(place: GridPlace): void {
@@ -172,6 +174,11 @@ export class FigureTable<Row> {
     return { rows: this.rows().length, columns: this.columns().length };
   }
 
+  /** What stands in a cell as somebody would type it: figures without grouping. */
+  private typed(column: FigureColumn<Row>, row: Row): string {
+    return column.kind === 'figure' ? ungrouped(column.text(row), this.formats.locale()) : column.text(row);
+  }
+
   private isEditable(): boolean {
     return this.at().column?.editable === true;
   }
@@ -190,7 +197,7 @@ export class FigureTable<Row> {
   private open(): void {
     const { line, column } = this.at();
     if (!line || !column) return;
-    if (column.editable) this.draft.set(column.text(line.row));
+    if (column.editable) this.draft.set(this.typed(column, line.row));
     else if (column.explained?.(line.row))
       this.host.nativeElement.querySelector<HTMLElement>('td[tabindex="0"] app-figure button')?.click();
     else if (this.selectable()) this.chosen.set(line.id);
