@@ -1,6 +1,7 @@
 import { openAccounts, type Accounts } from './accounts';
+import { openAgreements, type Agreements } from './agreements';
 import { openAudit, type Audit } from './audit';
-import { benchSheet, issuePapers } from './documents';
+import { PaperMaking } from './documents';
 import { openEstimates, type Estimates } from './estimates';
 import { openJobs, type Jobs } from './jobs';
 import { isPage } from './is-page';
@@ -15,6 +16,7 @@ export interface App {
   readonly rateCards: RateCards;
   readonly jobs: Jobs;
   readonly estimates: Estimates;
+  readonly agreements: Agreements;
   readonly web: WebServer;
   /** Clears away what has had its time: sessions, keys, links, files that no row names. */
   readonly sweep: () => Promise<void>;
@@ -40,10 +42,17 @@ export function openApp(platform: Platform, catcher?: MailCatcher): App {
     audit,
     rateCards,
     jobs,
-    papers: { issuePapers, benchSheet },
+    papers: new PaperMaking(),
   });
+  const agreements = openAgreements(platform, { jobs });
   const routes = [...audit.routes, ...accounts.routes, ...rateCards.routes, ...jobs.routes, ...estimates.routes];
-  const web = openWebServer(platform, { routes, identities: accounts.identities, isPage, catcher });
+  const web = openWebServer(platform, {
+    routes,
+    identities: accounts.identities,
+    visits: agreements.visits,
+    isPage,
+    catcher,
+  });
   const sweep = async () => void (await Promise.all([web.sweep(), accounts.sweep(), platform.files.sweep()]));
-  return { audit, accounts, rateCards, jobs, estimates, web, sweep };
+  return { audit, accounts, rateCards, jobs, estimates, agreements, web, sweep };
 }

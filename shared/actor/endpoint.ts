@@ -3,8 +3,8 @@ import type { Audience, Role } from '#shared/actor/role';
 
 export type Method = 'get' | 'post' | 'put' | 'patch' | 'delete';
 
-/** Who may call: anybody, any signed-in person (with or without a workshop), or the named roles. */
-export type Callers = 'anyone' | 'signed-in' | readonly [Role, ...Role[]];
+/** Who may call: anybody, any signed-in person (with or without a workshop), a client on a visit, or the named roles. */
+export type Callers = 'anyone' | 'signed-in' | 'client' | readonly [Role, ...Role[]];
 
 /** The answer's closed schema for each audience that may receive it. */
 export type Answers = Partial<Readonly<Record<Audience, z.ZodType>>>;
@@ -27,6 +27,8 @@ export interface Endpoint {
   readonly media?: string;
   /** The body is a file upload (multipart) with this field name. */
   readonly upload?: string;
+  /** The sender signs the bytes of the body, in the header of this name: there is no session and no token. */
+  readonly signature?: string;
   readonly idempotent?: boolean;
   readonly versioned?: boolean;
 }

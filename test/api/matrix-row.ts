@@ -1,6 +1,6 @@
 import type { WordCode } from '#shared/words/word-code';
 import type { Api, TestPerson, TestWorkshop } from './start-api';
-import type { Parts } from './visitor';
+import type { Parts, Visitor } from './visitor';
 
 /** What the matrix must know of one endpoint to call it: a new endpoint without its row fails. */
 export interface MatrixRow {
@@ -21,5 +21,18 @@ export interface MatrixRow {
   readonly namesRows?: true;
 }
 
+/** The client a call is made by, where the endpoint is for one. */
+export interface ClientCall {
+  readonly visitor: Visitor;
+  readonly parts: Parts;
+}
+
+/** What the matrix must know of an endpoint for clients: how one of a workshop comes to call it. */
+export interface ClientRow extends Omit<MatrixRow, 'prepare' | 'bySomebodyNew'> {
+  /** A client on a visit, and a valid call of theirs. */
+  readonly visit: (workshop: TestWorkshop, api: Api) => Promise<ClientCall>;
+}
+
 /** The rows of one feature, by the names of its endpoints. */
 export type MatrixRows = Readonly<Record<string, MatrixRow>>;
+export type ClientRows = Readonly<Record<string, ClientRow>>;

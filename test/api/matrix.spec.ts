@@ -3,7 +3,7 @@ import type { Endpoint } from '#shared/actor/endpoint';
 import { roles, type Role } from '#shared/actor/role';
 import { endpoints } from '#shared/endpoints';
 import type { MatrixRow } from './matrix-row';
-import { allRows } from './rows/all-rows';
+import { allRows, clientRows } from './rows/all-rows';
 import { canary, startApi, type Api, type TestPerson, type TestWorkshop } from './start-api';
 
 /**
@@ -17,6 +17,8 @@ beforeAll(async () => {
 afterAll(() => api.stop());
 
 const mayCall = ({ callers }: Endpoint, role: Role): boolean => typeof callers === 'string' || callers.includes(role);
+const forClients = endpoints.filter(({ callers }) => callers === 'client');
+const ofTheWorkshop = endpoints.filter(({ callers }) => callers !== 'client');
 const isSafe = ({ method }: Endpoint): boolean => method === 'get';
 
 const callerOf = (row: MatrixRow, workshop: TestWorkshop, role: Role): Promise<TestPerson> | TestPerson =>
@@ -34,7 +36,8 @@ const bytesOf = (response: Response): string =>
   Buffer.isBuffer(response.body) ? response.body.toString('latin1') : (response.text ?? '');
 
 test('every endpoint has its row, and no row is left over', () => {
-  expect(Object.keys(allRows).sort()).toEqual(endpoints.map(({ name }) => name).sort());
+  expect(Object.keys(allRows).sort()).toEqual(ofTheWorkshop.map(({ name }) => name).sort());
+  expect(Object.keys(clientRows).sort()).toEqual(forClients.map(({ name }) => name).sort());
 });
 
 test('every endpoint is served, under a name of its own', () => {
@@ -42,7 +45,7 @@ test('every endpoint is served, under a name of its own', () => {
   expect(new Set(endpoints.map(({ method, path }) => `${method} ${path}`)).size).toBe(endpoints.length);
 });
 
-describe.each(endpoints.map((endpoint) => [endpoint.name, endpoint] as const))('%s', (name, endpoint) => {
+describe.each(ofTheWorkshop.map((endpoint) => [endpoint.name, endpoint] as const))('%s', (name, endpoint) => {
   const row = allRows[name];
   const allowed = roles.filter((role) => mayCall(endpoint, role));
   const refused = roles.filter((role) => !mayCall(endpoint, role));
@@ -91,7 +94,7 @@ describe.each(endpoints.map((endpoint) => [endpoint.name, endpoint] as const))('
     });
   }
 
-  if (!isSafe(endpoint)) {
+  if (!isSafe(endpoint) && !endpoint.signature) {
     test('refuses a request that does not carry the token', async () => {
       const caller = await callerOf(row, api.ours, first);
       const parts = await row.prepare(api.ours, api, caller);
@@ -104,3 +107,49 @@ describe.each(endpoints.map((endpoint) => [endpoint.name, endpoint] as const))('
     });
   }
 });
+
+/** What clients may call: their own workshop's people are strangers to it, and so is any other client. */
+function clientsMayCall(endpoint: Endpoint): void {
+  const row = clientRows[endpoint.name];
+
+  test('answers the client on a visit', async () => {
+    const { visitor, parts } = await row.visit(api.ours, api);
+    const before = await historyOf(api.ours.id);
+    const response = await visitor.call(endpoint, parts);
+    expect([row.status ?? 200, row.status ?? 204]).toContain(response.status);
+    if (!row.history) return;
+    expect(await historyOf(api.ours.id)).toEqual({ count: before.count + (row.entries ?? 1), newest: row.history });
+  });
+
+  test.each(roles)('is not for the workshop’s own %s', async (role) => {
+    const { parts } = await row.visit(api.ours, api);
+    const before = await historyOf(api.ours.id);
+    expect((await api.as(role).call(endpoint, parts)).status).toBe(401);
+    expect(await historyOf(api.ours.id)).toEqual(before);
+  });
+
+  test('refuses a stranger', async () => {
+    const { parts } = await row.visit(api.ours, api);
+    expect((await (await api.stranger()).call(endpoint, parts)).status).toBe(401);
+  });
+
+  test('says nothing of another client, of this workshop or another', async () => {
+    const { visitor } = await row.visit(api.ours, api);
+    for (const workshop of [api.ours, api.theirs]) {
+      const { parts } = await row.visit(workshop, api);
+      const response = await visitor.call(endpoint, parts);
+      if (endpoint.params !== undefined || row.namesRows) expect(response.status).toBe(404);
+      expect(bytesOf(response)).not.toContain(canary);
+    }
+  });
+
+  if (!isSafe(endpoint)) {
+    test('refuses a request that does not carry the token', async () => {
+      const { visitor, parts } = await row.visit(api.ours, api);
+      visitor.token = 'x'.repeat(43);
+      expect((await visitor.call(endpoint, parts)).status).toBe(403);
+    });
+  }
+}
+
+for (const endpoint of forClients) describe(endpoint.name, () => clientsMayCall(endpoint));

@@ -53,6 +53,7 @@ export const money = {
   'price-insurance-over': 'Insurance at this rate would cost more than the price it insures. Please look at the rate.',
   'price-lump-sum-nowhere': 'There is no priced line to spread the lump sum over.',
   'price-below-nothing': 'The discount takes the price below nothing: {net_minor} would be left.',
+  'price-line-nothing': '“{line}” comes to nothing: its figures are still empty.',
   'price-below-cost': 'This price is {loss_minor} below cost.',
   'risk-trials': '{trials} trials, generator {generator}, seed {seed}',
   'risk-at-likely': 'Direct cost with every input at its likely value',

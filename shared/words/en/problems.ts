@@ -1,6 +1,7 @@
 export const problems = {
   'problem-invalid': 'Some entries need another look.',
   'problem-signed-out': 'Please sign in again.',
+  'problem-visit-over': 'This visit has ended. Please open the link of your letter again.',
   'problem-not-allowed': 'Your role does not include this.',
   'problem-not-found': 'There is nothing here under that address.',
   'problem-stale': 'Somebody else changed this in the meantime.',
@@ -10,6 +11,7 @@ export const problems = {
   'problem-unsupported': 'This kind of content is not accepted here.',
   'problem-forged': 'The request did not come from this application. Reload the page and try again.',
   'problem-unavailable': 'The workshop’s records cannot be reached for the moment. Nothing was lost; please try again shortly.',
+  'problem-busy': 'There is more of this in hand than can be done at once. Nothing was lost; please try again shortly.',
   'problem-gone': 'This link has been used already or is too old. Please ask for a new one.',
   'problem-no-version': 'The request does not say which version it changes (If-Match).',
   'problem-no-key': 'The request needs an Idempotency-Key of 16 to 80 characters.',

@@ -7,6 +7,9 @@ export const rateCards = {
   'card-grade-unknown': 'The rate card has no such grade of labour.',
   'card-leaf-unknown': 'The rate card has no such leaf.',
   'card-timber-unknown': 'The rate card has no such timber.',
+  'rate-card-not-begun': 'This rate card is not in force yet.',
+  'rate-card-effects-unseen':
+    'See first what this card does to the open estimates: it has not been worked out for the card as it stands.',
   'rate-card-none-in-force': 'No rate card is in force today.',
   'history-rate-card-planted': 'The start rate card was put in force',
   'rate-card-dated':

@@ -1,4 +1,4 @@
-import type { MatrixRows } from '../matrix-row';
+import type { ClientRows, MatrixRows } from '../matrix-row';
 import { accountsRows } from './accounts-rows';
 import { estimatesRows } from './estimates-rows';
 import { jobsRows } from './jobs-rows';
@@ -6,3 +6,6 @@ import { rateCardsRows } from './rate-cards-rows';
 
 /** The rows of every feature. */
 export const allRows: MatrixRows = { ...accountsRows, ...rateCardsRows, ...jobsRows, ...estimatesRows };
+
+/** The rows of what clients may call. */
+export const clientRows: ClientRows = {};

@@ -25,14 +25,20 @@ const form =
     });
   };
 
-const reader = (endpoint: Endpoint): RequestHandler => (endpoint.upload ? form(endpoint.upload) : json);
+const bytes = express.raw({ limit: limits.body, type: 'application/json' });
+
+/** A signed body is kept as it came: its signature is over the bytes. */
+function reader(endpoint: Endpoint): RequestHandler {
+  if (endpoint.signature) return bytes;
+  return endpoint.upload ? form(endpoint.upload) : json;
+}
 
 /** Before the body is read: what somebody may not send is not taken in. */
 const guarded =
   (endpoint: Endpoint): RequestHandler =>
   (request, _response, next) => {
-    guard(endpoint, signedInOf(request));
-    refuseWithoutToken(request);
+    guard(endpoint, signedInOf(request), request.client);
+    if (!endpoint.signature) refuseWithoutToken(request);
     next();
   };
 

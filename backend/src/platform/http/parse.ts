@@ -20,7 +20,7 @@ const schemaOf = (endpoint: Endpoint, part: Part): z.ZodType => {
   return schema instanceof z.ZodObject ? schema.strict() : (schema ?? nothing);
 };
 
-const sent = (request: Request, part: Part): unknown => request[part] ?? {};
+const sent = (request: Request, part: Part): unknown => (Buffer.isBuffer(request[part]) ? {} : (request[part] ?? {}));
 
 /** Parses the whole request and refuses it with all complaints at once; those of the body stand at their field's own path. */
 export function parseRequest(endpoint: Endpoint, request: Request): Parsed {

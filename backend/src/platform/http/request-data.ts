@@ -1,3 +1,4 @@
+import type { ClientActor } from '#shared/actor/client-actor';
 import type {} from 'express-serve-static-core';
 
 declare module 'express-serve-static-core' {
@@ -5,6 +6,8 @@ declare module 'express-serve-static-core' {
     requestId: string;
     workshopId?: string;
     accountId?: string;
+    /** The client on a visit, if the session has one that still holds. */
+    client?: ClientActor | undefined;
     /** The forgery token that the next session of the same person goes on with. */
     tokenToKeep?: string;
   }

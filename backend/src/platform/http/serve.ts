@@ -4,7 +4,7 @@ import { Rejection } from '#shared/problems/rejection';
 import type { Database } from '../database/database';
 import { signedInOf, type Sessions } from './sessions';
 import { FileAnswer, PreparedAnswer } from './answer';
-import type { Call, Upload } from './call';
+import type { Call, SignedBody, Upload } from './call';
 import { audienceFor } from './guard';
 import { keyOf, type IdempotencyKeys } from './idempotency';
 import type { Route } from './mount';
@@ -24,14 +24,24 @@ const uploadOf = (request: Request): Upload | undefined =>
     bytes: request.file.buffer,
   };
 
+const signedOf = (endpoint: Endpoint, request: Request): SignedBody | undefined =>
+  endpoint.signature
+    ? {
+        bytes: Buffer.isBuffer(request.body) ? request.body : Buffer.alloc(0),
+        signature: request.get(endpoint.signature) ?? '',
+      }
+    : undefined;
+
 function callOf(endpoint: Endpoint, request: Request, sessions: Sessions): Call {
   const signedIn = signedInOf(request);
   return {
     ...parseRequest(endpoint, request),
     person: signedIn?.person,
     actor: signedIn?.actor,
+    client: request.client,
     version: versionSeen(endpoint, request),
     upload: uploadOf(request),
+    signed: signedOf(endpoint, request),
     session: sessions.control(request),
     from: {
       requestId: request.requestId,
@@ -60,8 +70,9 @@ function withCurrent(route: Route, call: Call, error: unknown): unknown {
   return new Rejection('stale', error.code, { ...more, ...(current === undefined ? {} : { detail: current }) });
 }
 
-const scopeOf = (request: Request): string => {
+const scopeOf = (endpoint: Endpoint, request: Request): string => {
   const signedIn = signedInOf(request);
+  if (endpoint.callers === 'client') return `client ${request.client?.accessId ?? ''}`;
   return signedIn?.actor?.membershipId ?? signedIn?.person.accountId ?? `address ${request.ip ?? ''}`;
 };
 
@@ -73,8 +84,9 @@ export function serve(route: Route, serving: Serving): RequestHandler {
   const once = (request: Request, call: Call): Promise<unknown> => {
     if (!endpoint.idempotent) return run(request, call);
     const content = JSON.stringify([endpoint.name, call.params, call.query, call.body]);
-    return serving.keys.once({ scope: scopeOf(request), key: keyOf(request.get('idempotency-key')), content }, () =>
-      run(request, call),
+    return serving.keys.once(
+      { scope: scopeOf(endpoint, request), key: keyOf(request.get('idempotency-key')), content },
+      () => run(request, call),
     );
   };
   return async (request: Request, response: Response) => {

@@ -5,7 +5,7 @@ import { Passport } from 'passport';
 import { Strategy as LocalStrategy } from 'passport-local';
 import type { Config } from '../config/config';
 import { markUnattended, type SessionStore } from '../session/session-store';
-import type { Identities, Identity, SessionControl, SignedIn } from '../session/session-control';
+import type { Identities, Identity, SessionControl, SignedIn, Visit, Visits } from '../session/session-control';
 
 /** Requests that a page sends on its own, such as polling, carry this header and do not prolong a session. */
 export const unattendedHeader = 'x-unattended';
@@ -29,6 +29,7 @@ export class Sessions {
     private readonly config: Config,
     private readonly store: SessionStore,
     identities: Identities,
+    private readonly visits: Visits,
   ) {
     this.passport.serializeUser(
       (request: Request, user: Express.User, done: (error: unknown, user: Express.User) => void) => {
@@ -66,6 +67,7 @@ export class Sessions {
       }),
       unattended,
       this.passport.session() as RequestHandler,
+      this.visitRead(),
     ];
   }
 
@@ -80,6 +82,7 @@ export class Sessions {
         return request.session.forgeryToken ?? '';
       },
       signIn,
+      beginVisit: (visit) => this.beginVisit(request, visit),
       signInByPassword: () => this.byPassword(request, signIn),
       signOut: () => this.signOut(request),
     };
@@ -91,6 +94,27 @@ export class Sessions {
     if (passport?.user?.accountId === identity.accountId && forgeryToken) request.tokenToKeep = forgeryToken;
     return new Promise((resolve, reject) => {
       request.logIn(identity, (error) => (error ? reject(error as Error) : resolve()));
+    });
+  }
+
+  private visitRead(): RequestHandler {
+    return async (request, _response, next) => {
+      const { visit } = request.session;
+      if (visit) request.client = await this.visits.load(visit);
+      next();
+    };
+  }
+
+  /** Under a new id, so that nobody else knows the session a client reads in. */
+  private async beginVisit(request: Request, visit: Visit): Promise<void> {
+    const { passport, forgeryToken, handle } = request.session;
+    await new Promise<void>((resolve, reject) => {
+      request.session.regenerate((error) => (error ? reject(error as Error) : resolve()));
+    });
+    Object.assign(request.session, { visit, ...(passport?.user ? { passport, forgeryToken, handle } : {}) });
+    beginSession(request);
+    await new Promise<void>((resolve, reject) => {
+      request.session.save((error: unknown) => (error ? reject(error as Error) : resolve()));
     });
   }
 

@@ -1,7 +1,7 @@
 import compression from 'compression';
 import express, { type Express, type RequestHandler } from 'express';
 import { SessionStore } from '../session/session-store';
-import type { Identities } from '../session/session-control';
+import type { Identities, Visits } from '../session/session-control';
 import type { Platform } from '../platform';
 import type { MailCatcher } from '../mail/mail-catcher';
 import { apiRouter } from './api-router';
@@ -23,6 +23,7 @@ import { Rejection } from '#shared/problems/rejection';
 export interface WebParts {
   readonly routes: readonly Route[];
   readonly identities: Identities;
+  readonly visits: Visits;
   readonly isPage: (path: string) => boolean;
   /** Catches mail where there is no mail server; its page is for the machine's own user. */
   readonly catcher: MailCatcher | undefined;
@@ -47,6 +48,7 @@ const named: RequestHandler = (request, _response, next) => {
     request.accountId = signedIn.person.accountId;
     request.workshopId = signedIn.actor?.workshopId;
   }
+  request.workshopId ??= request.client?.workshopId;
   next();
 };
 
@@ -58,7 +60,7 @@ const notHere: RequestHandler = () => {
 export function openWebServer(platform: Platform, parts: WebParts): WebServer {
   const { config, clock, database, log } = platform;
   const store = new SessionStore(database, clock);
-  const sessions = new Sessions(config, store, parts.identities);
+  const sessions = new Sessions(config, store, parts.identities, parts.visits);
   const keys = new IdempotencyKeys(database, clock);
   const readiness = new Readiness(database);
   const app = express();

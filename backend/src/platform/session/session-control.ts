@@ -1,4 +1,5 @@
 import type { Actor } from '#shared/actor/actor';
+import type { ClientActor } from '#shared/actor/client-actor';
 import type { ValueFormats } from '#shared/words/say';
 
 /** What a session remembers of a person: who, and as whom of which workshop. */
@@ -29,6 +30,18 @@ export interface Identities {
   verify(entry: { email: string; password: string; address: string }): Promise<Identity | undefined>;
 }
 
+/** What a session remembers of a client's visit; whether it still holds is asked at every request. */
+export interface Visit {
+  readonly workshopId: string;
+  readonly accessId: string;
+}
+
+/** The port through which sessions learn which client a visit speaks for; `agreements` supplies it. */
+export interface Visits {
+  /** The client, or nobody if the access has ended or was taken back. */
+  load(visit: Visit): Promise<ClientActor | undefined>;
+}
+
 /** What a handler may do with the session of its request. */
 export interface SessionControl {
   /** The public handle of this session, undefined until somebody signed in. */
@@ -39,5 +52,7 @@ export interface SessionControl {
   signInByPassword(): Promise<Identity | undefined>;
   /** Signs in under a new session id. */
   signIn(identity: Identity): Promise<void>;
+  /** Begins a client's visit under a new session id; whoever is signed in stays so. */
+  beginVisit(visit: Visit): Promise<void>;
   signOut(): Promise<void>;
 }

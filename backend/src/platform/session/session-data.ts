@@ -7,6 +7,8 @@ declare module 'express-session' {
     /** The public handle of the session, by which its owner may end it. */
     handle: string;
     agent: string;
+    /** The client's visit, if one was begun. */
+    visit: { workshopId: string; accessId: string };
     passport: { user?: { accountId: string; membershipId?: string } };
     /** When the session was last marked as used, as the store read it. */
     seenAt: number;

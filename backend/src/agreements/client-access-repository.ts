@@ -1,0 +1,28 @@
+import { Op } from 'sequelize';
+import type { Database } from '../platform/database/database';
+import { WorkshopRows } from '../platform/database/workshop-rows';
+import { clientAccessTable, type ClientAccessRow } from './client-access-model';
+
+/** Ways in that clients were given. */
+export class ClientAccessRepository extends WorkshopRows<ClientAccessRow> {
+  constructor(database: Database) {
+    super(clientAccessTable(database));
+  }
+
+  ofJob(workshopId: string, jobId: string): Promise<ClientAccessRow[]> {
+    return this.list(workshopId, { where: { jobId }, order: [['id', 'DESC']], limit: 100 });
+  }
+
+  /** The access that still holds; nothing if it has ended or was taken back. */
+  async holding(workshopId: string, id: string, now: Date): Promise<ClientAccessRow | undefined> {
+    const where = { id, revokedAt: null, endsAt: { [Op.gt]: now } };
+    const [row] = await this.list(workshopId, { where, limit: 1 });
+    return row;
+  }
+
+  /** Whose secret this is, in whatever workshop; the secret alone says so, before anybody is known. */
+  async byTokenHash(tokenHash: string): Promise<ClientAccessRow | undefined> {
+    const row = await this.table.findOne({ where: { tokenHash }, raw: true });
+    return (row as unknown as ClientAccessRow | null) ?? undefined;
+  }
+}
