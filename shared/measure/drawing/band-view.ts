@@ -2,6 +2,7 @@ import type { BandShape } from '#shared/measure/band-shape';
 import { bandLength, bandSides, bandStretches } from '#shared/measure/band-stretches';
 import type { DrawingDimension, DrawingPath, DrawingView } from '#shared/measure/drawing/drawing';
 import { dimension, madeView } from '#shared/measure/drawing/made-view';
+import { uprightCuts } from '#shared/measure/drawing/flat-face';
 import { polylineData, spot } from '#shared/measure/drawing/polyline-data';
 import { closedOutline, overallDimensions, uprightCorners } from '#shared/measure/drawing/upright-corners';
 
@@ -37,6 +38,7 @@ export function bandView(shape: BandShape): DrawingView {
     view: 'unrolled',
     paths: [
       closedOutline(corners),
+      ...uprightCuts(shape.fluting, length_mm, height_mm),
       ...cuts.filter((at_mm) => at_mm < length_mm - 1e-3).map((at_mm) => upright('outline', at_mm, height_mm)),
       ...joints(shape).map((at_mm) => upright('hidden', at_mm, height_mm)),
     ],

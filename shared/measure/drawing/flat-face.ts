@@ -1,14 +1,30 @@
-import type { DrawingPoint, DrawingView } from '#shared/measure/drawing/drawing';
+import type { DrawingPath, DrawingPoint, DrawingView } from '#shared/measure/drawing/drawing';
 import { boxAround, madeView } from '#shared/measure/drawing/made-view';
 import { ellipseData, spot } from '#shared/measure/drawing/polyline-data';
-import { axis, closedOutline, overallDimensions, uprightCorners } from '#shared/measure/drawing/upright-corners';
+import { cutEdges, cutsAcross } from '#shared/measure/drawing/cut-spans';
+import {
+  axis,
+  closedOutline,
+  cutLine,
+  overallDimensions,
+  uprightCorners,
+} from '#shared/measure/drawing/upright-corners';
 import type { FlatShape } from '#shared/measure/flat-shape';
+import type { Fluting } from '#shared/measure/fluting';
 
-function straightFace(corners: readonly DrawingPoint[]): DrawingView {
+/** Edges of upright cuts side by side along a length, in mm. */
+export const uprightCuts = (fluting: Fluting | undefined, length_mm: number, height_mm: number): DrawingPath[] =>
+  fluting
+    ? cutEdges(cutsAcross(fluting, length_mm), fluting).map((edge) =>
+        cutLine([spot(edge * length_mm, 0), spot(edge * length_mm, height_mm)]),
+      )
+    : [];
+
+function straightFace(corners: readonly DrawingPoint[], cuts: readonly DrawingPath[] = []): DrawingView {
   const { width_mm, height_mm } = boxAround(corners);
   return madeView({
     view: 'face',
-    paths: [closedOutline(corners)],
+    paths: [closedOutline(corners), ...cuts],
     dimensions: overallDimensions(width_mm, height_mm),
     reach: corners,
   });
@@ -52,7 +68,10 @@ function cornersOf(points: readonly { readonly x_mm: number; readonly y_mm: numb
 export function flatFace(shape: FlatShape): DrawingView {
   switch (shape.kind) {
     case 'rectangle':
-      return straightFace(uprightCorners(shape.length_mm, shape.height_mm));
+      return straightFace(
+        uprightCorners(shape.length_mm, shape.height_mm),
+        uprightCuts(shape.fluting, shape.length_mm, shape.height_mm),
+      );
     case 'triangle':
       return straightFace([spot(shape.base_mm / 2, 0), spot(shape.base_mm, shape.height_mm), spot(0, shape.height_mm)]);
     case 'circle':

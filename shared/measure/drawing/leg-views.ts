@@ -1,48 +1,18 @@
+import { cutEdges, cutsRound, edgesInFront } from '#shared/measure/drawing/cut-spans';
 import type { DrawingPath, DrawingPoint, DrawingView } from '#shared/measure/drawing/drawing';
 import { boxAround, dimension, madeView } from '#shared/measure/drawing/made-view';
-import { ellipseData, polylineData, spot } from '#shared/measure/drawing/polyline-data';
+import { legCutParts, octagonPart, sectionView } from '#shared/measure/drawing/leg-section';
+import { polylineData, spot } from '#shared/measure/drawing/polyline-data';
 import { taperedElevation } from '#shared/measure/drawing/tapered-elevation';
-import { axis, closedOutline } from '#shared/measure/drawing/upright-corners';
+import { axis, closedOutline, cutLine } from '#shared/measure/drawing/upright-corners';
 import type { CabrioleShape, StationsShape, StraightLegShape } from '#shared/measure/leg-shape';
-
-const octagonPart = Math.tan(Math.PI / 8);
-
-function sectionData(section: StraightLegShape['section'], width_mm: number): string {
-  if (section === 'round') return ellipseData(spot(0, 0), [width_mm / 2, width_mm / 2]);
-  const corners = section === 'square' ? 4 : 8;
-  const radius_mm = width_mm / 2 / Math.cos(Math.PI / corners);
-  return polylineData(
-    Array.from({ length: corners }, (_, index) => {
-      const angle = ((2 * index + 1) * Math.PI) / corners;
-      return spot(radius_mm * Math.cos(angle), radius_mm * Math.sin(angle));
-    }),
-    true,
-  );
-}
-
-// The larger of head and foot as the outline of the plan, the other within it.
-function sectionView({ section, top_mm, foot_mm }: StraightLegShape): DrawingView {
-  const half_mm = Math.max(top_mm, foot_mm) / 2;
-  const inner = (kind: DrawingPath['kind'], width_mm: number): DrawingPath => ({
-    kind,
-    data: sectionData(section, width_mm),
-  });
-  return madeView({
-    view: 'plan',
-    paths: [
-      inner('outline', top_mm),
-      ...(foot_mm === top_mm ? [] : [inner(foot_mm < top_mm ? 'hidden' : 'outline', foot_mm)]),
-    ],
-    dimensions: [dimension(spot(-half_mm, half_mm), spot(half_mm, half_mm), 'below')],
-    reach: [spot(-half_mm, -half_mm), spot(half_mm, half_mm)],
-  });
-}
 
 /** Elevation and plan of a straight leg, in mm. */
 export const straightLegViews = (shape: StraightLegShape): DrawingView[] => [
   taperedElevation({
     ...shape,
     height_mm: shape.length_mm,
+    cutParts: legCutParts(shape),
     ...(shape.section === 'octagonal' ? { arrisPart: octagonPart } : {}),
   }),
   sectionView(shape),
@@ -51,6 +21,9 @@ export const straightLegViews = (shape: StraightLegShape): DrawingView[] => [
 /** A member by girths, drawn along its straightened axis as if it were round: each girth as its diameter, its station as a hidden line; in mm. */
 export function stationsElevation(shape: CabrioleShape | StationsShape): DrawingView {
   const stations = stationsOf(shape);
+  const cutPaths = cutPartsOf(shape, stations).map((part) =>
+    cutLine(stations.map(({ at_mm, girth_mm }) => spot((part * girth_mm) / (2 * Math.PI), at_mm))),
+  );
   const sides = (sign: 1 | -1) =>
     stations.map(({ at_mm, girth_mm }): DrawingPoint => spot((sign * girth_mm) / (2 * Math.PI), at_mm));
   const [left, right] = [sides(-1), sides(1)];
@@ -58,6 +31,7 @@ export function stationsElevation(shape: CabrioleShape | StationsShape): Drawing
   return madeView({
     view: 'elevation',
     paths: [
+      ...cutPaths,
       closedOutline([...right, ...left.toReversed()]),
       ...stations.map((_, index): DrawingPath => ({ kind: 'hidden', data: polylineData([left[index], right[index]]) })),
       axis(spot(0, top_mm), spot(0, top_mm + height_mm)),
@@ -65,6 +39,11 @@ export function stationsElevation(shape: CabrioleShape | StationsShape): Drawing
     dimensions: [dimension(spot(left_mm, top_mm), spot(left_mm, top_mm + height_mm), 'left')],
     reach: [...left, ...right],
   });
+}
+
+function cutPartsOf({ fluting }: CabrioleShape | StationsShape, stations: StationsShape['stations']): number[] {
+  const mean_mm = stations.reduce((sum, { girth_mm }) => sum + girth_mm, 0) / Math.max(1, stations.length);
+  return fluting ? edgesInFront(cutEdges(cutsRound(fluting, mean_mm), fluting)) : [];
 }
 
 function stationsOf(shape: CabrioleShape | StationsShape): StationsShape['stations'] {

@@ -10,9 +10,9 @@ import { helicoidElevation, twistedViews } from '#shared/measure/drawing/twisted
 import type { MouldingShape } from '#shared/measure/moulding-shape';
 import type { Shape } from '#shared/measure/shape';
 
-function mouldingViews({ profile, plan }: MouldingShape): DrawingView[] {
+function mouldingViews({ profile, plan, fluting }: MouldingShape): DrawingView[] {
   const seen = planView(plan);
-  return [profileView(profile), ...(seen ? [seen] : [])];
+  return [profileView(profile, fluting), ...(seen ? [seen] : [])];
 }
 
 function viewsOf(shape: Shape): DrawingView[] {
@@ -49,6 +49,6 @@ function viewsOf(shape: Shape): DrawingView[] {
 
 /**
  * A member drawn to scale in mm from the numbers its surface is worked from: section and plan of a moulding, elevation of turned
- * work, legs and solids, the face of flat work, an unrolled band with its stretches. The shape must be one its schema allows.
+ * work, legs and solids, the face of flat work, an unrolled band with its stretches; flutes, reeds and grooves as they are cut. The shape must be one its schema allows.
  */
 export const memberDrawing = (shape: Shape): Drawing => ({ views: viewsOf(shape) });

@@ -1,11 +1,12 @@
 import { spheroidRadiusAt } from '#shared/geometry/spheroid-zone-area';
 import { boxViews } from '#shared/measure/drawing/box-views';
+import { cutEdges, cutsRound, edgesInFront } from '#shared/measure/drawing/cut-spans';
 import type { DrawingView } from '#shared/measure/drawing/drawing';
 import { dimension, madeView } from '#shared/measure/drawing/made-view';
 import { arcData, ellipseData, lineData, moveData, spot } from '#shared/measure/drawing/polyline-data';
 import { taperedElevation } from '#shared/measure/drawing/tapered-elevation';
 import { axis } from '#shared/measure/drawing/upright-corners';
-import type { BossShape, SolidShape, TorusShape } from '#shared/measure/solid-shape';
+import type { BossShape, ConeShape, SolidShape, TorusShape } from '#shared/measure/solid-shape';
 
 /** A round body of two semi-axes, cut flat so far from its top and its bottom, in mm. */
 interface CutBody {
@@ -76,6 +77,12 @@ function bossElevation({ diameter_mm, height_mm }: BossShape): DrawingView {
   });
 }
 
+function coneElevation({ topDiameter_mm, bottomDiameter_mm, height_mm, fluting }: ConeShape): DrawingView {
+  const girth_mm = (Math.PI * (topDiameter_mm + bottomDiameter_mm)) / 2;
+  const cutParts = fluting ? edgesInFront(cutEdges(cutsRound(fluting, girth_mm), fluting)) : [];
+  return taperedElevation({ top_mm: topDiameter_mm, foot_mm: bottomDiameter_mm, height_mm, cutParts });
+}
+
 /** The views of a solid: an elevation, the plan of a ring, three views of a box; in mm. */
 export function solidViews(shape: SolidShape): DrawingView[] {
   switch (shape.kind) {
@@ -90,7 +97,7 @@ export function solidViews(shape: SolidShape): DrawingView[] {
     case 'torus':
       return [torusPlan(shape)];
     case 'cone':
-      return [taperedElevation({ ...shape, top_mm: shape.topDiameter_mm, foot_mm: shape.bottomDiameter_mm })];
+      return [coneElevation(shape)];
     case 'box':
       return boxViews(shape);
     case 'boss':

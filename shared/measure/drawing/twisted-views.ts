@@ -1,7 +1,10 @@
+import { cutSection, lengthThrough } from '#shared/measure/drawing/cut-section';
+import { cutsRound } from '#shared/measure/drawing/cut-spans';
 import type { DrawingPath, DrawingPoint, DrawingView } from '#shared/measure/drawing/drawing';
 import { dimension, madeView } from '#shared/measure/drawing/made-view';
 import { polylineData, spot } from '#shared/measure/drawing/polyline-data';
 import { axis, closedOutline, uprightCorners } from '#shared/measure/drawing/upright-corners';
+import type { Fluting } from '#shared/measure/fluting';
 import type { HelicoidShape, TwistedShape } from '#shared/measure/leg-shape';
 import { sectionOutline } from '#shared/measure/section-outline';
 
@@ -51,13 +54,22 @@ function sectionView(shape: TwistedShape): DrawingView {
   const half_mm = greatestRadius(shape);
   return madeView({
     view: 'plan',
-    paths: [closedOutline(corners)],
+    paths: [shape.fluting ? cutOutline(corners, shape.fluting) : closedOutline(corners)],
     dimensions:
       shape.section.outline === 'square'
         ? [dimension(corners[1], corners[0], 'below')]
         : [dimension(spot(-half_mm, half_mm), spot(half_mm, half_mm), 'below')],
-    reach: corners,
+    reach: shape.fluting?.cut === 'reeds' ? uprightReach(half_mm + shape.fluting.depth_mm) : corners,
   });
+}
+
+const uprightReach = (half_mm: number) => [spot(-half_mm, -half_mm), spot(half_mm, half_mm)];
+
+// The flutes wind with the twist; on the elevation they would hide it, so the section alone shows them.
+function cutOutline(corners: readonly DrawingPoint[], fluting: Fluting): DrawingPath {
+  const places = [...corners, corners[0]];
+  const cuts = cutsRound(fluting, lengthThrough(places));
+  return { kind: 'outline', data: cutSection({ places, inside: 'right' }, cuts, fluting) };
 }
 
 function greatestRadius({ section }: TwistedShape): number {

@@ -22,6 +22,9 @@ export const axis = (from: DrawingPoint, to: DrawingPoint): DrawingPath => ({
   data: polylineData([from, to]),
 });
 
+/** An edge of a cut through places. */
+export const cutLine = (places: readonly DrawingPoint[]): DrawingPath => ({ kind: 'cut', data: polylineData(places) });
+
 /** An outline of straight lines round places. */
 export const closedOutline = (places: readonly DrawingPoint[]): DrawingPath => ({
   kind: 'outline',

@@ -18,10 +18,10 @@ const viewNames: Readonly<Record<DrawingView['view'], string>> = {
   imports: [ScaleDrawing],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    @for (view of views(); track view.view) {
+    @for (view of views(); track $index) {
       <figure [class.slim]="view.isSlim">
         <figcaption class="muted">{{ view.name }}</figcaption>
-        <app-scale-drawing [view]="view.drawn" [label]="name() + ', ' + view.name" [most_px]="most_px()" />
+        <app-scale-drawing [view]="view.drawn" [label]="name() + ', ' + view.name" [most_px]="view.most_px" />
       </figure>
     } @empty {
       <p class="muted" i18n>A measured area is given as a figure; there is nothing to draw.</p>
@@ -35,13 +35,13 @@ const viewNames: Readonly<Record<DrawingView['view'], string>> = {
     }
 
     figure {
-      flex: 1 1 320px;
+      flex: 1 1 240px;
       min-width: 0;
       margin: 0;
     }
 
     .slim {
-      flex: 0 1 220px;
+      flex: 0 1 150px;
     }
 
     figcaption {
@@ -55,11 +55,17 @@ export class MemberPicture {
   readonly most_px = input(300);
 
   protected readonly views = computed(() =>
-    memberDrawing(this.shape()).views.map((drawn) => ({
-      drawn,
-      view: drawn.view,
-      name: viewNames[drawn.view],
-      isSlim: drawn.box.height_mm > 1.5 * drawn.box.width_mm,
-    })),
+    memberDrawing(this.shape()).views.map((drawn, index, all) => {
+      const isSlim = drawn.box.height_mm > 1.5 * drawn.box.width_mm;
+      const isSide = all.slice(0, index).some(({ view }) => view === drawn.view);
+      // What is tall and slim may be taller: it stands beside its plan.
+      return { drawn, isSlim, name: this.nameOf(drawn.view, isSide), most_px: this.most_px() * (isSlim ? 1.5 : 1) };
+    }),
   );
+
+  private nameOf(view: DrawingView['view'], isSide: boolean): string {
+    const { kind } = this.shape();
+    if (kind === 'cabriole' || kind === 'stations') return $localize`Straightened, each girth as a round`;
+    return isSide ? $localize`Side` : viewNames[view];
+  }
 }
