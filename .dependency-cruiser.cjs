@@ -17,6 +17,7 @@ const testSupport = '^(test|frontend/src/test)/';
 const schemaOrEndpoints = '^(shared/(endpoints|.+(-schema|-endpoints|/endpoint))|frontend/src/app/.+-schema)\\.ts$';
 const calculator = '^shared/(?!endpoints\\.ts|.+(-schema|-endpoints|/endpoint)\\.ts).+\\.ts$';
 const worker = '-worker\\.ts$';
+const paperWorker = '^backend/src/documents/paper-worker\\.ts$';
 const serverEntry = '^backend/src/[^/]+\\.ts$';
 const pageEntry = '^frontend/src/(app/)?[^/]+\\.ts$';
 
@@ -190,9 +191,17 @@ const calculators = [
     to: { pathNot: ['^shared/', installed(['convert-units', 'decimal\\.js'])] },
   }),
   never('A worker imports calculators only', {
-    comment: 'It carries no schema, no page and no database into its thread.',
-    from: { path: worker },
+    comment: 'It carries no schema, no page and no database into its thread; the maker of papers brings its papers.',
+    from: { path: worker, pathNot: paperWorker },
     to: { pathNot: [calculator, '^(node:)?worker_threads$'] },
+  }),
+];
+
+const paperThread = [
+  never('The thread of papers sees its own feature only', {
+    comment: 'It is given everything a paper says, and asks nobody.',
+    from: { path: paperWorker },
+    to: { pathNot: ['^backend/src/documents/', '^(node:)?worker_threads$'] },
   }),
 ];
 
@@ -220,7 +229,7 @@ const everywhere = [
 ];
 
 module.exports = {
-  forbidden: [...order, ...sides, ...doors, ...techniques, ...calculators, ...everywhere],
+  forbidden: [...order, ...sides, ...doors, ...techniques, ...calculators, ...paperThread, ...everywhere],
   options: {
     doNotFollow: { path: 'node_modules' },
     tsPreCompilationDeps: true,

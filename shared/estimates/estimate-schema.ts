@@ -77,5 +77,13 @@ export const keptChangesSchema = z.strictObject({
 });
 export type KeptChanges = z.infer<typeof keptChangesSchema>;
 
+/** An alternative by itself: its gross total and what it is more or less than the base, in minor units. */
+export const alternativeTotalSchema = z.strictObject({
+  id: identifier,
+  gross_minor: z.int(),
+  difference_minor: z.int(),
+});
+export type AlternativeTotal = z.infer<typeof alternativeTotalSchema>;
+
 /** Who else is at work on the estimate, and its version, so that a page knows when to read it again. */
 export const presenceSchema = z.strictObject({ version, others: z.array(z.string()), rateCardInForceId: identifier });

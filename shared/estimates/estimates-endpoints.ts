@@ -1,7 +1,8 @@
 import * as z from 'zod';
-import { endpoint, sameForAll } from '#shared/actor/endpoint';
+import { endpoint, sameForAll, sameForPriced } from '#shared/actor/endpoint';
 import { changesSchema } from '#shared/estimates/change-schema';
 import {
+  alternativeTotalSchema,
   costedEstimateSchema,
   estimateSummarySchema,
   keptChangesSchema,
@@ -59,13 +60,24 @@ export const changeEstimate = endpoint({
 
 export const takeRateCard = endpoint({
   name: 'takeRateCard',
-  summary: 'Work the estimate on the rate card in force from now on',
+  summary: 'Work the estimate on another rate card from now on: the one in force, or one that was',
   method: 'post',
   path: '/api/estimates/:estimateId/rate-card',
   callers: ['owner', 'estimator'],
   params: oneEstimate,
+  body: z.strictObject({ rateCardId: identifier }),
   versioned: true,
   answers: { cost: costedEstimateSchema },
+});
+
+export const readAlternatives = endpoint({
+  name: 'readAlternatives',
+  summary: 'Each alternative of the draft by itself: its gross total, and what it is more or less than the base',
+  method: 'get',
+  path: '/api/estimates/:estimateId/alternatives',
+  callers: ['owner', 'estimator', 'office'],
+  params: oneEstimate,
+  answers: sameForPriced(z.strictObject({ items: z.array(alternativeTotalSchema) })),
 });
 
 export const tellPresence = endpoint({

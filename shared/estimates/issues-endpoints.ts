@@ -7,7 +7,7 @@ import {
   papers,
   pricedIssueSummarySchema,
 } from '#shared/estimates/issue-schema';
-import { pricedEstimateSchema, costedEstimateSchema } from '#shared/estimates/estimate-schema';
+import { alternativeTotalSchema, costedEstimateSchema, pricedEstimateSchema } from '#shared/estimates/estimate-schema';
 import { identifier } from '#shared/problems/entry-schema';
 
 const oneEstimate = z.strictObject({ estimateId: identifier });
@@ -49,8 +49,7 @@ export const readDifferences = endpoint({
 const frozen = {
   summary: pricedIssueSummarySchema,
   differences: z.array(lineDifferenceSchema),
-  /** Each alternative by itself: its gross total and what it is more or less than the base. */
-  alternatives: z.array(z.strictObject({ id: identifier, gross_minor: z.int(), difference_minor: z.int() })),
+  alternatives: z.array(alternativeTotalSchema),
 };
 
 export const readIssue = endpoint({

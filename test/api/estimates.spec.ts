@@ -1,9 +1,10 @@
 import { randomUUID } from 'node:crypto';
 import type { Response } from 'supertest';
 import { v7 as newId } from 'uuid';
-import { changeEstimate, readEstimate } from '#shared/estimates/estimates-endpoints';
+import { changeEstimate, readAlternatives, readEstimate } from '#shared/estimates/estimates-endpoints';
 import { issueEstimate, listIssues, markIssue, readIssue, readPaper } from '#shared/estimates/issues-endpoints';
 import type { Change } from '#shared/estimates/change-schema';
+import type { AlternativeTotal, CostedEstimate } from '#shared/estimates/estimate-schema';
 import { listHistory } from '#shared/audit/history-endpoints';
 import { removeJob } from '#shared/jobs/jobs-endpoints';
 import { startApi, type Api } from './start-api';
@@ -186,6 +187,29 @@ describe('what each role is shown', () => {
     const keys = keysOf((await read('office', estimateId)).body);
     expect(keys).toContain('gross_minor');
     expect(keys.filter((key) => /cost|margin|markUp|profit|contingency|overhead|direct/i.test(key))).toEqual([]);
+  });
+});
+
+describe('the totals of alternatives', () => {
+  it('are shown to the office and those who see cost, as an issue would freeze them, and not to the bench', async () => {
+    const sample = await sampleEstimate(api.ours);
+    const { estimateId } = sample;
+    const { settings, settingsVersion } = (await read('owner', estimateId)).body as CostedEstimate;
+    const id = newId();
+    const line = { id: newId(), kind: 'price' as const, name: 'A crate', price: '250.00' };
+    const extra = { ...line, memberId: null, taxCategoryId: settings.taxCategoryId, alternativeId: id };
+    const alternative = { id, name: 'In a crate', group: '', note: '', replaces: [] };
+    const content = { ...settings, alternatives: [alternative], extras: [extra] };
+    await keep(estimateId, [{ kind: 'settings', id: estimateId, version: settingsVersion, content }]);
+    const ask = (role: 'owner' | 'office' | 'bench') => api.as(role).call(readAlternatives, { params: { estimateId } });
+    const { items } = (await ask('office')).body as { items: AlternativeTotal[] };
+    // 250.00 at 20 %, in whole cents; the lines of the base stay as they are.
+    expect(items).toEqual([{ id, gross_minor: expect.any(Number) as number, difference_minor: 300_00 }]);
+    expect((await ask('owner')).body).toEqual({ items });
+    expect((await ask('bench')).status).toBe(403);
+    const issued = (await issue(sample)).body as { id: string };
+    const frozen = (await api.as('office').call(readIssue, { params: { issueId: issued.id } })).body as object;
+    expect(frozen).toMatchObject({ alternatives: items });
   });
 });
 

@@ -21,7 +21,7 @@ import {
 import type { RateCardSummary } from '#shared/rate-cards/rate-card-summary-schema';
 import { startCard } from '#shared/rate-cards/start-card';
 import { withValueAt } from '#shared/rate-cards/tables/value-at';
-import { cardInForce, dayAhead, draftCard, wholeCard } from './sample-card';
+import { cardInForce, dayAhead, draftCard, wholeCard, workOut as workOutOf } from './sample-card';
 import { sampleEstimate } from './sample-estimate';
 import { startApi, type Api } from './start-api';
 import type { Visitor } from './visitor';
@@ -44,8 +44,16 @@ const withGilder = (content: RateCard, costPerHour: string): RateCard => withVal
 const keep = (card: WholeRateCard, content: RateCard, name = card.name) =>
   owner.call(keepRateCard, { ...at(card), body: { name, content } });
 
-const putFrom = async (card: RateCardSummary, days: number) =>
+const workOut = (id: string) => workOutOf(api.ours, api, id);
+
+const dateFrom = async (card: RateCardSummary, days: number) =>
   owner.call(putRateCardInForce, { ...at(card), body: { from: await dayAhead(api.ours, api, days) } });
+
+/** The effect is looked at, then the card is given its day. */
+const putFrom = async (card: RateCardSummary, days: number) => {
+  await workOut(card.id);
+  return dateFrom(card, days);
+};
 
 async function historyOf(id: string) {
   return api.platform.database.select<{ code: string; after: { count: number; lines: CardDifference[] } | null }>(
@@ -222,6 +230,26 @@ describe('A card put in force', () => {
     expect([response.status, problem(response).errors.map(({ path }) => path)]).toEqual([status, [['from']]]);
   });
 
+  it('is refused while nobody has seen what the card as it stands does to the open estimates', async () => {
+    const draft = await draftCard(api.ours);
+    const unseen = await dateFrom(draft, 70);
+    expect([unseen.status, problem(unseen).type]).toEqual([409, 'urn:problem:rate-card-effects-unseen']);
+    await owner.call(workCardEffects, { params: { rateCardId: draft.id } });
+    expect((await dateFrom(draft, 70)).status).toBe(409);
+    await api.platform.tasks.runDue();
+    const changed = summary(await keep(draft, withGilder(draft.content, '39.00')));
+    expect(problem(await dateFrom(changed, 70)).type).toBe('urn:problem:rate-card-effects-unseen');
+    expect((await putFrom(changed, 70)).status).toBe(200);
+  });
+
+  it('takes no estimate before its day has come', async () => {
+    const { estimateId } = await sampleEstimate(api.ours);
+    const set = summary(await putFrom(await draftCard(api.ours), 71));
+    const { version } = (await owner.call(readEstimate, { params: { estimateId } })).body as { version: number };
+    const asked = await owner.call(takeRateCard, { params: { estimateId }, body: { rateCardId: set.id }, version });
+    expect([asked.status, problem(asked).type]).toEqual([409, 'urn:problem:rate-card-not-begun']);
+  });
+
   it('is refused for what is no day', async () => {
     const draft = await draftCard(api.ours);
     for (const from of ['2026-02-30', 'soon', '', null])
@@ -259,11 +287,6 @@ describe('A card put in force', () => {
 describe('The effects of a draft on open estimates', () => {
   const effectsOf = async (id: string, by = owner) =>
     (await by.call(readCardEffects, { params: { rateCardId: id } })).body as CardEffectsAnswer;
-  const workOut = async (id: string) => {
-    const asked = (await owner.call(workCardEffects, { params: { rateCardId: id } })).body as CardEffectsAnswer;
-    await api.platform.tasks.runDue();
-    return asked;
-  };
 
   it('are not there until somebody asks', async () => {
     const draft = await draftCard(api.ours);
@@ -298,7 +321,7 @@ describe('The effects of a draft on open estimates', () => {
     const promised = (await effectsOf(draft.id)).effects.find((one) => one.estimateId === estimateId)!.after_minor;
     await putFrom({ ...draft, version: 2 }, 0);
     const { version } = (await owner.call(readEstimate, { params: { estimateId } })).body as { version: number };
-    const taken = await owner.call(takeRateCard, { params: { estimateId }, version });
+    const taken = await owner.call(takeRateCard, { params: { estimateId }, body: { rateCardId: draft.id }, version });
     expect((taken.body as { figures: { price: { net_minor: number } } }).figures.price.net_minor).toBe(promised);
   });
 
@@ -449,7 +472,11 @@ describe('The day of a card', () => {
       version: number;
     };
     expect(estimate.rateCardId).toBe(before.id);
-    const taken = await visitor.call(takeRateCard, { params: { estimateId }, version: estimate.version });
-    expect((taken.body as { rateCardId: string }).rateCardId).toBe(draft.id);
+    const take = (rateCardId: string, version: number) =>
+      visitor.call(takeRateCard, { params: { estimateId }, body: { rateCardId }, version });
+    const taken = (await take(draft.id, estimate.version)).body as { rateCardId: string; version: number };
+    expect(taken.rateCardId).toBe(draft.id);
+    const undone = (await take(before.id, taken.version)).body as { rateCardId: string };
+    expect(undone.rateCardId).toBe(before.id);
   });
 });

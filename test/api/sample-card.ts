@@ -1,6 +1,7 @@
 import { v7 as newId } from 'uuid';
-import { copyRateCard, listRateCards, readRateCard } from '#shared/rate-cards/rate-cards-endpoints';
+import { copyRateCard, listRateCards, readRateCard, workCardEffects } from '#shared/rate-cards/rate-cards-endpoints';
 import type { WholeRateCard } from '#shared/rate-cards/rate-cards-endpoints';
+import type { CardEffectsAnswer } from '#shared/rate-cards/card-effects-schema';
 import type { RateCardSummary } from '#shared/rate-cards/rate-card-summary-schema';
 import { addDays } from '#shared/calendar/add-days';
 import type { Api, TestWorkshop } from './start-api';
@@ -25,6 +26,13 @@ export async function draftCard(workshop: TestWorkshop, name = `${workshop.mark}
 export async function wholeCard(workshop: TestWorkshop, rateCardId: string): Promise<WholeRateCard> {
   const response = await workshop.people.owner.visitor.call(readRateCard, { params: { rateCardId } });
   return response.body as WholeRateCard;
+}
+
+/** Has the effects of a card worked out, as one does before it is put in force. */
+export async function workOut(workshop: TestWorkshop, api: Api, rateCardId: string): Promise<CardEffectsAnswer> {
+  const asked = await workshop.people.owner.visitor.call(workCardEffects, { params: { rateCardId } });
+  await api.platform.tasks.runDue();
+  return asked.body as CardEffectsAnswer;
 }
 
 /** The day it is in the workshop, and so many days later. */

@@ -1,2 +1,1 @@
-export { benchSheet } from './bench-sheet/bench-sheet';
-export { issuePapers } from './issue-papers';
+export { PaperMaking } from './paper-making';

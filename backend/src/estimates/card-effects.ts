@@ -1,9 +1,6 @@
 import { setImmediate as letOthersIn } from 'node:timers/promises';
-import { draftInOrder } from '#shared/estimates/draft-in-order';
-import { estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
 import type { Figures } from '#shared/estimates/figures';
 import { lineDifferences, type NamedLines } from '#shared/estimates/line-differences';
-import { riskOf } from '#shared/estimates/risk/risk-of';
 import type { JobState } from '#shared/jobs/job-schema';
 import type { CardEffect } from '#shared/rate-cards/card-effects';
 import type { RateCard } from '#shared/rate-cards/rate-card';
@@ -11,12 +8,14 @@ import type { Finding } from '#shared/words/finding';
 import type { Jobs, NamedJobRow } from '../jobs';
 import type { CardEffects, RateCardService } from '../rate-cards';
 import type { EstimateService } from './estimate-service';
-import type { WholeEstimate } from './worked-estimate';
+import type { RiskDrawing } from './risk-drawing';
+import { inputOf, type WholeEstimate } from './worked-estimate';
 
 interface Parts {
   readonly drafts: EstimateService;
   readonly jobs: Pick<Jobs, 'service'>;
   readonly cards: RateCardService;
+  readonly risks: Pick<RiskDrawing, 'priced'>;
 }
 
 /** An estimate whose price can still change: nobody has accepted or declined it. */
@@ -27,13 +26,6 @@ interface OpenEstimate {
 
 const openStates: readonly JobState[] = ['open', 'sent'];
 const jobsAtOnce = 100;
-
-/** Draws are made only where the price waits for them. */
-function figuresOn(card: RateCard, { estimate, pieces, members }: WholeEstimate): Figures {
-  const draft = draftInOrder(estimate.settings, pieces, members);
-  const prepared = prepareEstimate({ draft, choice: [], card, currency: estimate.currency });
-  return estimateFigures(prepared, prepared.needsRisk ? riskOf(prepared.risk) : null);
-}
 
 const isGrave = ({ kind }: Finding): boolean => kind === 'missing' || kind === 'refuse';
 const graveOf = ({ findings, cost }: Figures): Finding[] => [...findings, ...cost.findings].filter(isGrave);
@@ -98,11 +90,13 @@ export const cardEffects =
   async ({ workshopId, content }, tell) => {
     const open = await openEstimates(workshopId, parts);
     const effects: CardEffect[] = [];
+    const figuresOn = (card: RateCard, whole: WholeEstimate) => parts.risks.priced(inputOf(whole, card));
     await tell(0, open.length);
     for (const { job, estimateId } of open) {
       const whole = await parts.drafts.whole(workshopId, estimateId);
       const own = await parts.cards.card(workshopId, whole.estimate.rateCardId);
-      effects.push(effectOf({ whole, job, before: figuresOn(own, whole), after: figuresOn(content, whole) }));
+      const [before, after] = [await figuresOn(own, whole), await figuresOn(content, whole)];
+      effects.push(effectOf({ whole, job, before, after }));
       await tell(effects.length, open.length);
       await letOthersIn();
     }

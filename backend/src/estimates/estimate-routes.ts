@@ -2,6 +2,7 @@ import {
   beginEstimate,
   changeEstimate,
   listEstimates,
+  readAlternatives,
   readEstimate,
   takeRateCard,
   tellPresence,
@@ -26,6 +27,12 @@ export const estimateRoutes = (estimates: EstimateService, presences: PresenceSe
     ({ actor, params, body }) => estimates.change(actor, params.estimateId, body.changes),
     (standing: unknown) => standing,
   ),
-  mount(takeRateCard, ({ actor, params, version }) => estimates.takeCard(actor, { id: params.estimateId, version })),
+  mount(takeRateCard, ({ actor, params, version, body }) =>
+    estimates.takeCard(actor, { id: params.estimateId, version }, body.rateCardId),
+  ),
+  mount(readAlternatives, async ({ actor, params }) => {
+    const whole = await estimates.whole(actor.workshopId, params.estimateId);
+    return { items: await estimates.alternatives(whole) };
+  }),
   mount(tellPresence, ({ actor, params }) => presences.tell(actor, params.estimateId)),
 ];

@@ -3,12 +3,13 @@ import { v7 as newId } from 'uuid';
 import type { Actor } from '#shared/actor/actor';
 import { audienceOf } from '#shared/actor/role';
 import type { Change } from '#shared/estimates/change-schema';
-import type { Draft } from '#shared/estimates/draft';
+import type { Choice, Draft } from '#shared/estimates/draft';
 import { draftInOrder } from '#shared/estimates/draft-in-order';
-import type { CostedEstimate, KeptChanges } from '#shared/estimates/estimate-schema';
+import type { AlternativeTotal, CostedEstimate, KeptChanges } from '#shared/estimates/estimate-schema';
 import type { Figures } from '#shared/estimates/figures';
 import { startSettings } from '#shared/estimates/start-settings';
 import { Rejection } from '#shared/problems/rejection';
+import type { RateCard } from '#shared/rate-cards/rate-card';
 import type { WorkshopService } from '../accounts';
 import type { AuditService } from '../audit';
 import { jobNumber, type Jobs } from '../jobs';
@@ -24,7 +25,8 @@ import { presentEstimate } from './estimate-presenter';
 import type { EstimateRepository } from './estimate-repository';
 import type { PresenceRepository } from './presence-repository';
 import type { ReadingService } from './reading-service';
-import { workedEstimate, type WholeEstimate } from './worked-estimate';
+import type { RiskDrawing } from './risk-drawing';
+import { inputOf, type WholeEstimate } from './worked-estimate';
 
 export interface EstimateParts {
   readonly estimates: EstimateRepository;
@@ -33,6 +35,7 @@ export interface EstimateParts {
   readonly presences: PresenceRepository;
   readonly readings: ReadingService;
   readonly changes: ChangeService;
+  readonly risks: RiskDrawing;
   readonly cards: RateCardService;
   readonly jobs: Pick<Jobs, 'job' | 'client' | 'markState' | 'touch'>;
   readonly workshops: WorkshopService;
@@ -106,7 +109,23 @@ export class EstimateService {
   }
 
   async figures(whole: WholeEstimate): Promise<Figures> {
-    return workedEstimate(whole, await this.parts.cards.card(whole.estimate.workshopId, whole.estimate.rateCardId));
+    return this.parts.risks.figures(inputOf(whole, await this.cardOf(whole)));
+  }
+
+  /** Each alternative worked by itself, and its difference to the base. */
+  async alternatives(whole: WholeEstimate): Promise<AlternativeTotal[]> {
+    const { alternatives } = whole.estimate.settings;
+    if (alternatives.length === 0) return [];
+    const card = await this.cardOf(whole);
+    const gross = async (choice: Choice) =>
+      (await this.parts.risks.priced(inputOf(whole, card, choice))).price.gross_minor;
+    const base_minor = await gross([]);
+    return Promise.all(
+      alternatives.map(async ({ id }) => {
+        const gross_minor = await gross([id]);
+        return { id, gross_minor, difference_minor: gross_minor - base_minor };
+      }),
+    );
   }
 
   /** Keeps a list of changes, all or nothing, and answers the figures of record. */
@@ -144,10 +163,10 @@ export class EstimateService {
     }
   }
 
-  /** Works the estimate on the card in force from now on. */
-  async takeCard(actor: Actor, at: { id: string; version: number }): Promise<CostedEstimate> {
+  /** Works the estimate on another card from now on: the one in force, or one that was, so that taking a card can be undone. */
+  async takeCard(actor: Actor, at: { id: string; version: number }, rateCardId: string): Promise<CostedEstimate> {
     const { workshopId } = actor;
-    const card = await this.parts.cards.inForce(workshopId);
+    const card = await this.parts.cards.begun(workshopId, rateCardId);
     const changedAt = this.parts.clock.now();
     const row = await this.parts.estimates.change(workshopId, at, { rateCardId: card.id, changedAt });
     const values = { number: row.number, card: card.name };
@@ -165,6 +184,10 @@ export class EstimateService {
   async followIssue({ workshopId, id, version }: EstimateRow, letter: string): Promise<void> {
     await this.parts.estimates.change(workshopId, { id, version }, { letter, changedAt: this.parts.clock.now() });
     await this.refresh(workshopId, id);
+  }
+
+  private cardOf({ estimate }: WholeEstimate): Promise<RateCard> {
+    return this.parts.cards.card(estimate.workshopId, estimate.rateCardId);
   }
 
   private async raise(estimate: EstimateRow, settings: EstimateRow['settings'] | null): Promise<void> {

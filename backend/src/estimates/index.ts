@@ -18,6 +18,7 @@ import { PresenceRepository } from './presence-repository';
 import { PresenceService } from './presence-service';
 import { ReadingRepository } from './reading-repository';
 import { ReadingService } from './reading-service';
+import { RiskDrawing } from './risk-drawing';
 
 export type { BenchSheetRequest, PaperFile, PaperMaker } from './paper-maker';
 export type { EstimateService } from './estimate-service';
@@ -50,6 +51,7 @@ export function openEstimates({ database, clock, files }: Platform, needs: Estim
     jobs: needs.jobs,
     workshops: needs.accounts.workshops,
     audit: needs.audit.service,
+    risks: new RiskDrawing(),
     clock,
   };
   const readings = new ReadingService(new ReadingRepository(database));
@@ -63,7 +65,7 @@ export function openEstimates({ database, clock, files }: Platform, needs: Estim
     papers: needs.papers,
   });
   const presence = new PresenceService({ ...parts, presences });
-  const effects = cardEffects({ drafts, jobs: needs.jobs, cards: needs.rateCards.service });
+  const effects = cardEffects({ drafts, jobs: needs.jobs, cards: needs.rateCards.service, risks: parts.risks });
   const routes = [...estimateRoutes(drafts, presence), ...issueRoutes(issues)];
   return { drafts, issues, cardEffects: effects, routes };
 }

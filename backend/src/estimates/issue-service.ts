@@ -187,6 +187,7 @@ export class IssueService {
     return snapshotOf({
       ...worked,
       ...paper,
+      alternatives: await this.parts.drafts.alternatives(worked.whole),
       card: await this.parts.cards.get(workshopId, estimate.rateCardId),
       workshop: await this.parts.workshops.get(workshopId),
       client: { name: client.name, contact: client.contact, address: client.address },

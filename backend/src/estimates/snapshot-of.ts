@@ -1,9 +1,8 @@
 import { addDays } from '#shared/calendar/add-days';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import { draftInOrder } from '#shared/estimates/draft-in-order';
-import { estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
+import type { AlternativeTotal } from '#shared/estimates/estimate-schema';
 import type { Figures } from '#shared/estimates/figures';
-import { riskOf } from '#shared/estimates/risk/risk-of';
 import type { Snapshot, SnapshotClient, SnapshotJob, SnapshotWorkshop } from '#shared/estimates/snapshot';
 import type { WorkshopSettingsRow } from '../accounts';
 import type { RateCardRow } from '../rate-cards';
@@ -13,6 +12,7 @@ import type { WholeEstimate } from './worked-estimate';
 export interface Freezing {
   readonly whole: WholeEstimate;
   readonly figures: Figures;
+  readonly alternatives: readonly AlternativeTotal[];
   readonly card: RateCardRow;
   readonly workshop: WorkshopSettingsRow;
   readonly client: SnapshotClient;
@@ -42,19 +42,9 @@ export const snapshotWorkshop = (workshop: WorkshopSettingsRow): SnapshotWorksho
   };
 };
 
-function alternativesOf({ whole, figures, card }: Freezing): Snapshot['alternatives'] {
-  const { settings, currency } = whole.estimate;
-  const draft = draftInOrder(settings, whole.pieces, whole.members);
-  return settings.alternatives.map(({ id }) => {
-    const prepared = prepareEstimate({ draft, choice: [id], card: card.content, currency });
-    const { gross_minor } = estimateFigures(prepared, riskOf(prepared.risk)).price;
-    return { id, gross_minor, difference_minor: gross_minor - figures.price.gross_minor };
-  });
-}
-
 /** Freezes an estimate: inputs, card, results, the paper's particulars; validity runs from the day of issue in the workshop's zone. */
 export function snapshotOf(freezing: Freezing): Snapshot {
-  const { whole, figures, card, workshop, client, job, letter, now, today, issuedBy, note } = freezing;
+  const { whole, figures, alternatives, card, workshop, client, job, letter, now, today, issuedBy, note } = freezing;
   const { estimate, pieces, members } = whole;
   return {
     snapshotVersion: 1,
@@ -73,6 +63,6 @@ export function snapshotOf(freezing: Freezing): Snapshot {
     card: card.content,
     choice: [],
     figures,
-    alternatives: alternativesOf(freezing),
+    alternatives,
   };
 }

@@ -1,7 +1,6 @@
+import type { Choice } from '#shared/estimates/draft';
 import { draftInOrder } from '#shared/estimates/draft-in-order';
-import { estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
-import type { Figures } from '#shared/estimates/figures';
-import { riskOf } from '#shared/estimates/risk/risk-of';
+import type { EstimateInput } from '#shared/estimates/estimate-figures';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import type { MemberContentRow, PieceContentRow } from './content-model';
 import type { EstimateRow } from './estimate-model';
@@ -13,9 +12,8 @@ export interface WholeEstimate {
   readonly members: readonly MemberContentRow[];
 }
 
-/** The figures of record of the base: no alternative chosen, risk drawn. */
-export function workedEstimate({ estimate, pieces, members }: WholeEstimate, card: RateCard): Figures {
-  const draft = draftInOrder(estimate.settings, pieces, members);
-  const prepared = prepareEstimate({ draft, choice: [], card, currency: estimate.currency });
-  return estimateFigures(prepared, riskOf(prepared.risk));
+/** What an estimate is worked from, on a card and with a choice of alternatives; none is the base. */
+export function inputOf(whole: WholeEstimate, card: RateCard, choice: Choice = []): EstimateInput {
+  const { estimate, pieces, members } = whole;
+  return { draft: draftInOrder(estimate.settings, pieces, members), choice, card, currency: estimate.currency };
 }

@@ -10,7 +10,7 @@ import type { RateCardRepository } from './rate-card-repository';
 
 interface Parts {
   readonly cards: RateCardRepository;
-  readonly effects: Pick<CardEffectsRepository, 'follow'>;
+  readonly effects: Pick<CardEffectsRepository, 'find' | 'follow'>;
   readonly history: CardHistory;
   readonly clock: Clock;
   /** The day it is in a workshop. */
@@ -35,6 +35,7 @@ export class CardInForceService {
     if (from < (await this.parts.today(actor.workshopId))) throw ofDay('invalid', 'rate-card-day-past');
     const other = await cards.headFrom(actor.workshopId, from);
     if (other) throw ofDay('conflict', 'rate-card-day-taken', { name: other.name });
+    await this.refuseUnseen(card);
     const dated = await this.change(card, from);
     await history.record(actor, dated, { code: 'history-rate-card-in-force', values: { day: from } });
     return dated;
@@ -51,6 +52,13 @@ export class CardInForceService {
     const draft = await this.change(card, null);
     await history.record(actor, draft, { code: 'history-rate-card-taken-back' });
     return draft;
+  }
+
+  /** Nobody is surprised by what a card does: it is worked out for the card as it stands before that has a day. */
+  private async refuseUnseen({ workshopId, id, version }: RateCardRow): Promise<void> {
+    const known = await this.parts.effects.find(workshopId, id);
+    if (known?.state !== 'done' || known.cardVersion !== version)
+      throw new Rejection('conflict', 'rate-card-effects-unseen');
   }
 
   /** Another day, the same content: what it does to open estimates stays known. */

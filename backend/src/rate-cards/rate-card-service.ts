@@ -62,6 +62,14 @@ export class RateCardService {
     return this.parts.cards.get(workshopId, id);
   }
 
+  /** A card an estimate may be worked on: in force, or in force before. */
+  async begun(workshopId: string, id: string): Promise<RateCardRow> {
+    const row = await this.get(workshopId, id);
+    if (row.inForceFrom === null || row.inForceFrom > (await this.today(workshopId)))
+      throw new Rejection('conflict', 'rate-card-not-begun');
+    return row;
+  }
+
   async card(workshopId: string, id: string): Promise<RateCard> {
     return (await this.get(workshopId, id)).content;
   }

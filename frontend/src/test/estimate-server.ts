@@ -2,7 +2,7 @@ import type { Provider } from '@angular/core';
 import type { Change } from '#shared/estimates/change-schema';
 import { draftInOrder } from '#shared/estimates/draft-in-order';
 import { estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
-import type { CostedEstimate, KeptChanges } from '#shared/estimates/estimate-schema';
+import type { AlternativeTotal, CostedEstimate, KeptChanges } from '#shared/estimates/estimate-schema';
 import type { Figures, WorkFigures } from '#shared/estimates/figures';
 import type { PricedIssueSummary } from '#shared/estimates/issue-schema';
 import type { MemberContent, PieceContent, Zone } from '#shared/estimates/member';
@@ -101,8 +101,10 @@ export const refusal = (status: number, more: object = {}): ProblemError =>
     problemSchema.parse({ type: 'about:blank', title: `refused ${status}`, status, instance: '', errors: [], ...more }),
   );
 
+type Served = 'read' | 'change' | 'card' | 'takeCard' | 'alternatives' | 'job' | 'issues';
+
 /** The server's side of one estimate, in memory: versions, staleness and figures as the real one has them. */
-export class EstimateServer implements Pick<EstimateClient, 'read' | 'change' | 'card' | 'job' | 'issues'> {
+export class EstimateServer implements Pick<EstimateClient, Served> {
   pieces: Row<PieceContent>[] = [{ id: ids.piece, version: 1, content: { name: 'Base', place: 0, note: '' } }];
   members: Row<MemberContent>[] = [...startMembers];
   settings: EstimateSettings = startSettings(startCard, {
@@ -113,6 +115,8 @@ export class EstimateServer implements Pick<EstimateClient, 'read' | 'change' | 
   });
   settingsVersion = 1;
   version = 1;
+  rateCardId: string = ids.card;
+  totals: readonly AlternativeTotal[] = [];
   /** Every list of changes that arrived. */
   readonly arrived: (readonly Change[])[] = [];
   /** What to fail the next requests with, in order; undefined lets one pass. */
@@ -131,7 +135,7 @@ export class EstimateServer implements Pick<EstimateClient, 'read' | 'change' | 
         jobId: ids.job,
         number: '12-1',
         version: this.version,
-        rateCardId: ids.card,
+        rateCardId: this.rateCardId,
         currency: 'EUR',
         pieces: this.pieces,
         members: this.members,
@@ -159,6 +163,13 @@ export class EstimateServer implements Pick<EstimateClient, 'read' | 'change' | 
     }) as unknown as KeptChanges;
   }
 
+  takeCard(_seen: { id: string; version: number }, rateCardId: string): Promise<CostedEstimate> {
+    this.rateCardId = rateCardId;
+    this.version += 1;
+    return this.read();
+  }
+
+  alternatives = () => Promise.resolve(this.totals);
   card = () => Promise.resolve(startCard);
   job = () =>
     Promise.resolve({ title: 'Pier table, paired herons' } as unknown as Awaited<ReturnType<EstimateClient['job']>>);

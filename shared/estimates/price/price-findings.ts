@@ -19,9 +19,17 @@ function missingTaxes(lines: PriceLines, input: PriceInput): Finding[] {
     .map((category) => ({ kind: 'missing', code: 'price-tax-missing', values: { category } }));
 }
 
-/** What is to be told about a price: rates that are not in the card, a discount that leaves nothing, work sold below its cost. */
+/** A further line that comes to nothing was most likely left unfinished; insurance of the price itself follows the price. */
+function emptyExtras({ lines }: PriceLines, { extras }: PriceInput): Finding[] {
+  const ids = new Set(extras.filter((one) => one.kind !== 'insurance' || one.value !== null).map(({ id }) => id));
+  return lines
+    .filter((line) => ids.has(line.id) && line.price_minor === 0)
+    .map(({ id, name }) => ({ kind: 'warn', code: 'price-line-nothing', values: { line: name ?? '' }, about: id }));
+}
+
+/** What is to be told about a price: rates that are not in the card, further lines at nothing, a discount that leaves nothing, work sold below its cost. */
 export function priceFindings(lines: PriceLines, profit_minor: number, input: PriceInput): Finding[] {
-  const findings = [...missingGrades(input), ...missingTaxes(lines, input)];
+  const findings = [...missingGrades(input), ...missingTaxes(lines, input), ...emptyExtras(lines, input)];
   if (lines.net_minor < 0)
     findings.push({ kind: 'refuse', code: 'price-below-nothing', values: { net_minor: lines.net_minor } });
   else if (profit_minor < 0)

@@ -211,6 +211,14 @@ describe('discount, tax and lump sum', () => {
     expect(priceOf({ ...leg, taxCategoryId: 'export' }).client).toMatchObject({ tax_minor: 0, gross_minor: 1121_34 });
   });
 
+  it('tells of a further line that comes to nothing, and where it stands', () => {
+    const [empty, full] = ['0', '0.01'].map((price) => extra({ kind: 'price', price }));
+    expect(priceOf(withExtras(full)).findings).toEqual([]);
+    expect(priceOf(withExtras(empty)).findings).toEqual([
+      { kind: 'warn', code: 'price-line-nothing', values: { line: 'Extra' }, about: 'extra' },
+    ]);
+  });
+
   it('tells what is missing, what is sold below cost and what would be below nothing', () => {
     const codes = (input: PriceInput) => priceOf(input).findings.map((finding) => finding.code);
     expect(codes(leg)).toEqual([]);

@@ -49,10 +49,12 @@ export const estimatesRows: MatrixRows = {
   takeRateCard: {
     prepare: async (workshop, api) => {
       const { estimateId } = await sampleEstimate(workshop);
-      return { params: { estimateId }, version: await versionOf(workshop, api, estimateId) };
+      const { rateCardId } = (await api.app.estimates.drafts.whole(workshop.id, estimateId)).estimate;
+      return { params: { estimateId }, body: { rateCardId }, version: await versionOf(workshop, api, estimateId) };
     },
     history: 'history-card-taken',
   },
+  readAlternatives: { prepare: oneEstimate },
   tellPresence: { prepare: oneEstimate },
   listIssues: { prepare: oneEstimate },
   issueEstimate: {

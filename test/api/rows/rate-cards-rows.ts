@@ -2,7 +2,7 @@ import { randomInt } from 'node:crypto';
 import { v7 as newId } from 'uuid';
 import { putRateCardInForce, type WholeRateCard } from '#shared/rate-cards/rate-cards-endpoints';
 import type { MatrixRows } from '../matrix-row';
-import { cardInForce, dayAhead, draftCard } from '../sample-card';
+import { cardInForce, dayAhead, draftCard, workOut } from '../sample-card';
 import type { Api, TestWorkshop } from '../start-api';
 
 const at = ({ id, version }: Pick<WholeRateCard, 'id' | 'version'>) => ({ params: { rateCardId: id }, version });
@@ -13,8 +13,14 @@ const draft = async (workshop: TestWorkshop) => at(await draftCard(workshop));
 const someDay = (workshop: TestWorkshop, api: Api): Promise<string> =>
   dayAhead(workshop, api, randomInt(400, 2_000_000));
 
-async function setCard(workshop: TestWorkshop, api: Api) {
+async function seenCard(workshop: TestWorkshop, api: Api): Promise<WholeRateCard> {
   const card = await draftCard(workshop);
+  await workOut(workshop, api, card.id);
+  return card;
+}
+
+async function setCard(workshop: TestWorkshop, api: Api) {
+  const card = await seenCard(workshop, api);
   const body = { from: await someDay(workshop, api) };
   const response = await workshop.people.owner.visitor.call(putRateCardInForce, { ...at(card), body });
   return at(response.body as WholeRateCard);
@@ -47,7 +53,10 @@ export const rateCardsRows: MatrixRows = {
   workCardEffects: { prepare: draft },
   readCardEffects: { prepare: draft },
   putRateCardInForce: {
-    prepare: async (workshop, api) => ({ ...(await draft(workshop)), body: { from: await someDay(workshop, api) } }),
+    prepare: async (workshop, api) => ({
+      ...at(await seenCard(workshop, api)),
+      body: { from: await someDay(workshop, api) },
+    }),
     history: 'history-rate-card-in-force',
   },
   takeRateCardBack: { prepare: setCard, history: 'history-rate-card-taken-back' },

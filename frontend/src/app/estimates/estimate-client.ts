@@ -1,8 +1,14 @@
 import { Injectable, inject } from '@angular/core';
 import type { AnswerOf, BodyOf } from '#shared/actor/endpoint';
 import type { Change } from '#shared/estimates/change-schema';
-import type { CostedEstimate, KeptChanges } from '#shared/estimates/estimate-schema';
-import { changeEstimate, readEstimate, takeRateCard, tellPresence } from '#shared/estimates/estimates-endpoints';
+import type { AlternativeTotal, CostedEstimate, KeptChanges } from '#shared/estimates/estimate-schema';
+import {
+  changeEstimate,
+  readAlternatives,
+  readEstimate,
+  takeRateCard,
+  tellPresence,
+} from '#shared/estimates/estimates-endpoints';
 import type { PricedIssueSummary } from '#shared/estimates/issue-schema';
 import { listIssues } from '#shared/estimates/issues-endpoints';
 import type { Job } from '#shared/jobs/job-schema';
@@ -38,8 +44,13 @@ export class EstimateClient {
     return this.api.call(changeEstimate, { params: { estimateId }, body });
   }
 
-  takeCard(estimateId: string, version: number): Promise<CostedEstimate> {
-    return this.api.call(takeRateCard, { params: { estimateId }, version });
+  takeCard(seen: { id: string; version: number }, rateCardId: string): Promise<CostedEstimate> {
+    const { id: estimateId, version } = seen;
+    return this.api.call(takeRateCard, { params: { estimateId }, body: { rateCardId }, version });
+  }
+
+  async alternatives(estimateId: string, signal: AbortSignal): Promise<readonly AlternativeTotal[]> {
+    return (await this.api.call(readAlternatives, { params: { estimateId }, signal })).items;
   }
 
   /** Nobody's hand makes this call: it keeps no session alive. */

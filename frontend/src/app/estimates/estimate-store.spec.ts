@@ -282,6 +282,33 @@ describe('EstimateStore', () => {
       expect(server.member(ids.edge)).toEqual(before);
     });
 
+    it('another rate card that was taken, and takes it again', async () => {
+      await open();
+      rename(ids.edge, 'Rim');
+      await store.takeCard(ids.piece);
+      expect([server.rateCardId, server.member(ids.edge)?.name]).toEqual([ids.piece, 'Rim']);
+      store.undo();
+      await wait(10);
+      expect([server.rateCardId, store.head()?.rateCardId]).toEqual([ids.card, ids.card]);
+      store.redo();
+      await wait(10);
+      expect(server.rateCardId).toBe(ids.piece);
+      expect(store.undo()).toEqual([]);
+      await wait(10);
+      expect(store.undo()).toEqual([ids.edge]);
+    });
+
+    it('no rate card where somebody else took one since', async () => {
+      await open();
+      await store.takeCard(ids.piece);
+      server.rateCardId = ids.leg;
+      await store.reload();
+      store.undo();
+      await wait(10);
+      expect(server.rateCardId).toBe(ids.leg);
+      expect(TestBed.inject(Notices).current()[0].text).toContain('The rate card was changed by somebody else since');
+    });
+
     it('nothing somebody else changed since, and says so', async () => {
       await open();
       rename(ids.edge, 'Rim');

@@ -2,7 +2,6 @@ import { Injectable, computed, effect, inject, resource, signal, untracked } fro
 import { takeUntilDestroyed, toObservable } from '@angular/core/rxjs-interop';
 import { EMPTY, switchMap } from 'rxjs';
 import type { KeptChanges } from '#shared/estimates/estimate-schema';
-import type { Figures, PricedFigures } from '#shared/estimates/figures';
 import type { Member, MemberContent, Piece, PieceContent } from '#shared/estimates/member';
 import type { EstimateSettings } from '#shared/estimates/settings';
 import { Notices } from '../core/problems/notices';
@@ -16,6 +15,7 @@ import type { Undone } from './draft/undo-history';
 import { UnfinishedEntries } from './draft/unfinished-entries';
 import { EstimateClient } from './estimate-client';
 import { LiveFigures } from './figures/live-figures';
+import { asCosted, asPriced } from './figures/seen-figures';
 import { Presence, type PresenceAnswer } from './presence';
 
 /** Which estimate the workspace shows. */
@@ -154,7 +154,7 @@ export class EstimateStore {
 
   /** Takes the last step back; gives the ids it touched. */
   undo(): readonly string[] {
-    return this.told(this.rows.undo());
+    return this.told(this.rows.undo(this.known()?.rateCardId));
   }
 
   /** Gives up what could not be kept of a member, if there is any: one sees again what is kept. */
@@ -165,7 +165,7 @@ export class EstimateStore {
   }
 
   redo(): readonly string[] {
-    return this.told(this.rows.redo());
+    return this.told(this.rows.redo(this.known()?.rateCardId));
   }
 
   /** Sends what is unsent at once; true when the server has everything. */
@@ -178,16 +178,28 @@ export class EstimateStore {
     this.live.choose(choice);
   }
 
-  /** Works the estimate on the rate card in force from now on. */
-  async takeCard(): Promise<void> {
-    const isKept = await this.flush();
-    const head = this.known();
-    if (isKept && head) this.take(await this.client.takeCard(head.id, head.version));
+  /** Works the estimate on another rate card from now on, as one step of undo. */
+  async takeCard(rateCardId: string): Promise<void> {
+    const before = this.known()?.rateCardId;
+    if ((await this.workOn(rateCardId)) && before) this.rows.recordCard({ before, after: rateCardId });
   }
 
   /** After an issue was made or marked. */
   reloadIssues(): void {
     this.issuesRead.reload();
+  }
+
+  private async workOn(rateCardId: string): Promise<boolean> {
+    const isKept = await this.flush();
+    const head = this.known();
+    if (!isKept || !head) return false;
+    this.take(await this.client.takeCard(head, rateCardId));
+    return true;
+  }
+
+  /** The card of a step that was undone or done again. */
+  private turnCard(rateCardId: string): void {
+    this.workOn(rateCardId).catch((error: unknown) => this.notices.complain((error as Error).message));
   }
 
   private async read(): Promise<void> {
@@ -224,6 +236,7 @@ export class EstimateStore {
   private told(undone: Undone | undefined): readonly string[] {
     if (!undone) return [];
     if ('edits' in undone) {
+      if (undone.rateCardId) this.turnCard(undone.rateCardId);
       this.saving.release(undone.edits.map(({ id }) => id));
       return undone.edits.map(({ id }) => id);
     }
@@ -233,9 +246,3 @@ export class EstimateStore {
     return [];
   }
 }
-
-type AnyFigures = ReturnType<LiveFigures['figures']>;
-
-const asPriced = (figures: AnyFigures): PricedFigures | undefined =>
-  figures && 'price' in figures ? figures : undefined;
-const asCosted = (figures: AnyFigures): Figures | undefined => (figures && 'cost' in figures ? figures : undefined);

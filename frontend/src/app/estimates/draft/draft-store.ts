@@ -16,7 +16,7 @@ import {
 } from './draft-rows';
 import type { Edit } from './edit';
 import type { ReadEstimate } from './read-estimate';
-import { UndoHistory, type Undone } from './undo-history';
+import { UndoHistory, type CardStep, type Present, type Undone } from './undo-history';
 
 /** The rows of the draft with what was typed over them, and the way back. */
 @Injectable()
@@ -45,12 +45,17 @@ export class DraftStore {
     this.lay(edits);
   }
 
-  undo(): Undone | undefined {
-    return this.step(this.history.undo((edit) => this.present(edit)));
+  /** Remembers that another card was taken, as a step like any other. */
+  recordCard(card: CardStep): void {
+    this.history.record({ before: [], after: [], at: this.now().getTime(), key: '', card });
   }
 
-  redo(): Undone | undefined {
-    return this.step(this.history.redo((edit) => this.present(edit)));
+  undo(rateCardId?: string): Undone | undefined {
+    return this.step(this.history.undo(this.presentOn(rateCardId)));
+  }
+
+  redo(rateCardId?: string): Undone | undefined {
+    return this.step(this.history.redo(this.presentOn(rateCardId)));
   }
 
   present({ kind, id }: Pick<Edit, 'kind' | 'id'>): Edit['content'] {
@@ -74,6 +79,10 @@ export class DraftStore {
   dropIdle(): void {
     const rows = this.state();
     if (rows) this.drop(idleIds(rows));
+  }
+
+  private presentOn(rateCardId: string | undefined): Present {
+    return { content: (edit) => this.present(edit), rateCardId };
   }
 
   private step(undone: Undone | undefined): Undone | undefined {

@@ -1,21 +1,16 @@
-import { Injectable, computed, inject, signal } from '@angular/core';
+import { Injectable, computed, inject, resource, signal } from '@angular/core';
 import { takeUntilDestroyed, toObservable } from '@angular/core/rxjs-interop';
 import { type Observable, debounceTime, forkJoin, map, of, switchMap } from 'rxjs';
 import type { Choice, Draft } from '#shared/estimates/draft';
+import type { AlternativeTotal } from '#shared/estimates/estimate-schema';
 import { type EstimateInput, estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
 import type { Figures } from '#shared/estimates/figures';
 import type { RateCard } from '#shared/rate-cards/rate-card';
+import { EstimateClient } from '../estimate-client';
 import { EstimateStore } from '../estimate-store';
 import { drawnBy } from '../figures/drawn';
 import { RISK_STARTER } from '../figures/risk-starter';
 import type { WorkerStarter } from '../../core/workers/worker-token';
-
-/** What an alternative by itself makes of the price, gross, against the base. */
-export interface AlternativeTotal {
-  readonly id: string;
-  readonly gross_minor: number;
-  readonly difference_minor: number;
-}
 
 const afterTheLastKey_ms = 400;
 
@@ -32,11 +27,19 @@ interface Asked {
   readonly currency: string;
 }
 
-/** Each alternative worked by itself, and its difference to the base, as an issue would freeze it. */
+/**
+ * Each alternative worked by itself, and its difference to the base, as an issue would freeze it: on this page for those who see cost, by
+ * the server for the office.
+ */
 @Injectable()
 export class AlternativeTotals {
   private readonly store = inject(EstimateStore);
+  private readonly client = inject(EstimateClient);
   private readonly startRisk = inject(RISK_STARTER);
+  private readonly told = resource({
+    params: () => this.toAsk(),
+    loader: ({ params, abortSignal }) => this.client.alternatives(params.id, abortSignal),
+  });
   private readonly worked = signal<{ readonly asked: Asked; readonly totals: readonly AlternativeTotal[] } | undefined>(
     undefined,
   );
@@ -47,8 +50,13 @@ export class AlternativeTotals {
     return isAsked && card && currency ? { draft, card, currency } : undefined;
   });
   /** What was worked last, by id; the figures of a moment ago while `isPending`. */
-  readonly totals = computed(() => new Map((this.worked()?.totals ?? []).map((total) => [total.id, total])));
-  readonly isPending = computed(() => this.asked() !== undefined && this.worked()?.asked !== this.asked());
+  readonly totals = computed(() => {
+    const told = this.told.hasValue() ? this.told.value() : [];
+    return new Map((this.worked()?.totals ?? told).map((total) => [total.id, total]));
+  });
+  readonly isPending = computed(
+    () => this.told.isLoading() || (this.asked() !== undefined && this.worked()?.asked !== this.asked()),
+  );
 
   constructor() {
     toObservable(this.asked)
@@ -58,6 +66,13 @@ export class AlternativeTotals {
         takeUntilDestroyed(),
       )
       .subscribe((worked) => this.worked.set(worked));
+  }
+
+  /** Asked anew with every version of the estimate. */
+  private toAsk(): { readonly id: string; readonly version: number } | undefined {
+    const [head, count] = [this.store.head(), this.store.settings()?.alternatives.length ?? 0];
+    const isTold = this.store.seesPrices() && !this.store.mayEdit() && count > 0;
+    return isTold && head ? { id: head.id, version: head.version } : undefined;
   }
 
   private work(asked: Asked) {

@@ -49,7 +49,7 @@ export class AlternativesPart {
   protected readonly columns = computed<readonly FigureColumn<Alternative>[]>(() => [
     { key: 'name', heading: $localize`Alternative`, kind: 'text', text: ({ name }) => name, minor: ({ note }) => note },
     ...(this.isSmall() || !this.hasGroups() ? [] : [this.groupColumn()]),
-    ...(this.store.mayEdit() ? this.moneyColumns() : []),
+    ...(this.store.seesPrices() ? this.moneyColumns() : []),
   ]);
   protected readonly rowId = ({ id }: Alternative): string => id;
 

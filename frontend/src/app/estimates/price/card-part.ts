@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@a
 import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
 import { lineDifferences } from '#shared/estimates/line-differences';
+import type { RateCardSummary } from '#shared/rate-cards/rate-card-summary-schema';
 import { Formats } from '../../core/formats/formats';
 import { Notices } from '../../core/problems/notices';
 import { ProblemError } from '../../core/problems/problem-error';
@@ -58,11 +59,14 @@ export class CardPart {
     await this.busily(async () => this.change.set(await this.cards.change(rateCardId)));
   }
 
-  protected async take(name: string): Promise<void> {
+  protected async take({ id, name }: RateCardSummary): Promise<void> {
     await this.busily(async () => {
-      await this.store.takeCard();
+      await this.store.takeCard(id);
       this.change.set(undefined);
-      this.notices.say($localize`The estimate is worked on “${name}:card:” from now on.`);
+      this.notices.say($localize`The estimate is worked on “${name}:card:” from now on.`, {
+        label: $localize`Undo`,
+        run: () => void this.store.undo(),
+      });
     });
   }
 

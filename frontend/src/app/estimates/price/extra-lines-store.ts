@@ -2,6 +2,7 @@ import { Injectable, computed, inject } from '@angular/core';
 import type { EstimateSettings, ExtraLine } from '#shared/estimates/settings';
 import { Formats } from '../../core/formats/formats';
 import { Words } from '../../core/formats/words';
+import { newId } from '../../core/new-id';
 import type { EditedCell, PastedCells } from '../../ui/table/figure-column';
 import { UnfinishedEntries } from '../draft/unfinished-entries';
 import { EstimateStore } from '../estimate-store';
@@ -73,12 +74,15 @@ export class ExtraLinesStore {
     if (line && isCell(key)) this.takeCell(line, key, text);
   }
 
-  /** Cells of a spreadsheet fill the lines from here down; those beyond the last line are left. */
+  /** Cells of a spreadsheet fill the lines from here down; what is beyond the last makes further lines of its kind. */
   paste({ rowId, keys, lines: texts }: PastedCells): void {
     const first = this.lines().findIndex(({ id }) => id === rowId);
+    const last = this.lines().at(-1);
+    if (first < 0 || !last) return;
+    const beyond = texts.slice(this.lines().length - first).map(() => ({ ...last, id: newId() }));
+    if (beyond.length > 0) this.keep([...this.lines(), ...beyond]);
     texts.forEach((cells, down) => {
-      const id = this.lines().at(first + down)?.id;
-      if (id === undefined || first < 0) return;
+      const { id } = this.lines()[first + down];
       cells.forEach((text, across) => this.type({ rowId: id, key: keys.at(across) ?? '', text }));
     });
   }

@@ -4,6 +4,7 @@ import { Formats } from '../../core/formats/formats';
 import { Notices } from '../../core/problems/notices';
 import { Icon } from '../../ui/icon/icon';
 import { EmptyState } from '../../ui/page/empty-state';
+import { FindingList } from '../../ui/page/finding-list';
 import { FigureTable } from '../../ui/table/figure-table';
 import { EstimateStore } from '../estimate-store';
 import { extraColumns, type ExtraRow } from './extra-columns';
@@ -16,7 +17,7 @@ import { usualExtras, type UsualExtra } from './usual-extras';
 /** Further lines: work and goods no member carries, added from the card with one press and entered in a dense table. */
 @Component({
   selector: 'app-extras-part',
-  imports: [EmptyState, ExtraLineForm, FigureTable, Icon, MatButton, MatIconButton],
+  imports: [EmptyState, ExtraLineForm, FigureTable, FindingList, Icon, MatButton, MatIconButton],
   changeDetection: ChangeDetectionStrategy.OnPush,
   providers: [ExtraLinesStore],
   templateUrl: './extras-part.html',
@@ -34,6 +35,11 @@ export class ExtrasPart {
   protected readonly columns = computed(() => extraColumns(this.formats, this.isSmall()));
   /** The chosen line, as a list of one, so that another line is another form. */
   protected readonly chosenLines = computed(() => this.lines.lines().filter(({ id }) => id === this.chosen()));
+  /** What is to be told of a further line; choosing it opens the line. */
+  protected readonly findings = computed(() => {
+    const ids = new Set(this.lines.lines().map(({ id }) => id));
+    return (this.store.costed()?.cost.findings ?? []).filter(({ about }) => about !== undefined && ids.has(about));
+  });
   protected readonly rowId = ({ line }: ExtraRow): string => line.id;
 
   protected add(usual: UsualExtra): void {

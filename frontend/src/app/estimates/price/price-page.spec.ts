@@ -266,7 +266,53 @@ describe('PricePage', () => {
     });
   });
 
+  async function paste(row: number, column: number, text: string): Promise<void> {
+    element().querySelectorAll('.content tbody tr')[row].querySelectorAll('td')[column].click();
+    await settle();
+    const event = new Event('paste', { bubbles: true, cancelable: true });
+    Object.assign(event, { clipboardData: { getData: () => text } });
+    element().querySelector('.content table')!.dispatchEvent(event);
+    await settle();
+  }
+
+  it('takes lines of a spreadsheet, and makes further lines of those beyond the last', async () => {
+    await open('extras');
+    button('Timber').click();
+    await settle();
+    await paste(0, 0, 'Lime\t\t12\nOak\t\t30\nPine\t\t8');
+    expect(grid().map(([name, , quantity]) => [name, quantity])).toEqual([
+      ['Lime', '12'],
+      ['Oak', '30'],
+      ['Pine', '8'],
+    ]);
+    await settle(700);
+    expect(new Set(server.settings.extras.map(({ id }) => id)).size).toBe(3);
+  });
+
+  it('warns of a further line that comes to nothing', async () => {
+    await open('extras');
+    button('Timber').click();
+    await settle();
+    const told = () => spoken(element().querySelector('app-extras-part app-finding-list'));
+    await fill(0, 2, '0');
+    expect(told()).toContain('comes to nothing');
+    await fill(0, 2, '12');
+    expect(told()).toBe('');
+  });
+
   describe('takes stages', () => {
+    it('of a spreadsheet, as many as there are', async () => {
+      await open('stages');
+      await paste(1, 0, 'Begun\t10\nCarved\t40\nGilt\t30\nSet up\t20');
+      await settle(700);
+      expect(server.settings.stages.parts.map(({ name, percent }) => [name, percent])).toEqual([
+        ['Begun', 10],
+        ['Carved', 40],
+        ['Gilt', 30],
+        ['Set up', 20],
+      ]);
+    });
+
     it('that come to 100 %, waiting with those that do not, and shows every payment to the cent', async () => {
       await open('stages');
       const before = server.settings.stages.parts;
@@ -290,6 +336,24 @@ describe('PricePage', () => {
       expect(spoken(element().querySelector('app-stage-terms-form [role="alert"]'))).toContain('Deposit and retention');
       expect(server.settings.stages.deposit_percent).toBe(30);
     });
+  });
+
+  it('shows the office what each alternative comes to, without a word of cost', async () => {
+    const whole = await server.read();
+    const { cost: _cost, ...figures } = whole.figures;
+    const { profit: _profit, contingency: _risk, extras: _extras, seed: _seed, ...settings } = whole.settings;
+    const plain = { id: ids.leg, name: 'Bare back', group: '', note: '', replaces: [] };
+    server.read = () =>
+      Promise.resolve({
+        ...whole,
+        figures,
+        settings: { ...settings, alternatives: [plain] },
+      } as unknown as typeof whole);
+    server.totals = [{ id: ids.leg, gross_minor: 123_456, difference_minor: -2_000 }];
+    await open('alternatives', ['office']);
+    await settle();
+    expect(grid()).toEqual([['Bare back', '1,234.56', '− 20.00']]);
+    expect(element().querySelector('.content button')).toBeNull();
   });
 
   describe('takes alternatives', () => {
@@ -378,7 +442,7 @@ describe('PricePage', () => {
       const taken = jest.spyOn(store, 'takeCard').mockResolvedValue();
       button('Take the card in force').click();
       await settle();
-      expect(taken).toHaveBeenCalledTimes(1);
+      expect(taken.mock.calls).toEqual([[ids.piece]]);
     });
   });
 

@@ -4,7 +4,7 @@ import type { Stage } from '#shared/estimates/settings';
 import { Formats } from '../../core/formats/formats';
 import { Words } from '../../core/formats/words';
 import { newId } from '../../core/new-id';
-import type { EditedCell } from '../../ui/table/figure-column';
+import type { EditedCell, PastedCells } from '../../ui/table/figure-column';
 import { FigureTable } from '../../ui/table/figure-table';
 import { UnfinishedEntries } from '../draft/unfinished-entries';
 import { EstimateStore } from '../estimate-store';
@@ -72,6 +72,20 @@ export class StagesPart {
   protected type({ rowId, key: cell, text }: EditedCell): void {
     if (rowId === 'whole') return this.keep([{ id: newId(), name: text, share: '100' }]);
     this.keep(this.entries().map((entry) => (entry.id === rowId ? { ...entry, [cell]: text } : entry)));
+  }
+
+  /** Cells of a spreadsheet fill the stages from here down; what is beyond the last makes further stages. */
+  protected paste({ rowId, keys, lines }: PastedCells): void {
+    const entries = [...this.entries()];
+    const at = entries.findIndex(({ id }) => id === rowId);
+    if (at < 0 && rowId !== 'whole') return;
+    lines.forEach((texts, down) => {
+      const place = Math.max(0, at) + down;
+      const cells = Object.fromEntries(texts.map((text, across) => [keys.at(across) ?? '', text]));
+      const { id, name, share } = entries.at(place) ?? { id: newId(), name: $localize`Stage`, share: '' };
+      entries[place] = { id, name: cells['name'] ?? name, share: cells['share'] ?? share };
+    });
+    this.keep(entries);
   }
 
   /** A further stage takes what is missing. */

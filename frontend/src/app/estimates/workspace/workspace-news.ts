@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { MatButton } from '@angular/material/button';
+import { RouterLink } from '@angular/router';
 import { FreshPage } from '../../core/routing/fresh-page';
 import { Formats } from '../../core/formats/formats';
 import { EstimateStore } from '../estimate-store';
@@ -7,7 +8,7 @@ import { EstimateStore } from '../estimate-store';
 /** What one should know while at work: who else is here, that the card is an old one, that the page is. */
 @Component({
   selector: 'app-workspace-news',
-  imports: [MatButton],
+  imports: [MatButton, RouterLink],
   changeDetection: ChangeDetectionStrategy.OnPush,
   host: { role: 'status', class: 'no-print' },
   template: `
@@ -23,7 +24,9 @@ import { EstimateStore } from '../estimate-store';
     @if (store.mayEdit() && store.isCardOld()) {
       <p>
         <span i18n>Worked on a rate card that is no longer in force.</span>
-        <button matButton type="button" (click)="store.takeCard()" i18n>Take the card in force</button>
+        <a matButton [routerLink]="comparison()" [queryParams]="{ part: 'card' }" i18n
+          >See what the newer card changes</a
+        >
       </p>
     }
   `,
@@ -53,6 +56,11 @@ export class WorkspaceNews {
   private readonly freshPage = inject(FreshPage);
   protected readonly store = inject(EstimateStore);
 
+  /** The price place, where the two cards stand side by side before one is taken. */
+  protected readonly comparison = computed(() => {
+    const opened = this.store.ids();
+    return ['/jobs', opened?.jobId, 'estimates', opened?.estimateId, 'price'];
+  });
   protected readonly others = computed(() => {
     const names = this.store.others();
     if (names.length === 0) return '';

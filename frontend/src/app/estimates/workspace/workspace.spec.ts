@@ -104,7 +104,9 @@ describe('Workspace', () => {
     await settle(6000);
     expect(text('app-workspace-news p')[0]).toBe('Wim Haas and Orla Kinsella are at work on this estimate too.');
     expect(text('app-workspace-news span')[0]).toBe('Worked on a rate card that is no longer in force.');
-    expect(button('Take the card in force')).toBeDefined();
+    const link = element().querySelector('app-workspace-news a');
+    expect(link?.textContent?.trim()).toBe('See what the newer card changes');
+    expect(link?.getAttribute('href')).toBe(`/jobs/${ids.job}/estimates/${ids.estimate}/price?part=card`);
   });
 
   it('reads again what somebody else changed', async () => {

@@ -1,0 +1,86 @@
+import { Worker } from 'node:worker_threads';
+import { Rejection } from '#shared/problems/rejection';
+import type { ThreadFile } from './thread-file';
+
+interface Waiting<Question, Answer> {
+  readonly question: Question;
+  readonly resolve: (answer: Answer) => void;
+  readonly reject: (error: Error) => void;
+}
+
+/** What a thread sends back: its answer, or why there is none. */
+export type ThreadReply<Answer> = { readonly answer: Answer } | { readonly error: string };
+
+const mostWaiting = 200;
+const idle_milliseconds = 20_000;
+const retryAfter_seconds = 10;
+
+/**
+ * Costly work in one thread of its own, question by question in the order they came, so that everybody else is answered meanwhile.
+ * More than 200 waiting are refused; a thread that has nothing to do ends, and one that failed is begun anew for the next question.
+ */
+export class ThreadQueue<Question, Answer> {
+  private readonly waiting: Waiting<Question, Answer>[] = [];
+  private running: Waiting<Question, Answer> | undefined;
+  private thread: Worker | undefined;
+  private idle: NodeJS.Timeout | undefined;
+
+  constructor(
+    private readonly start: () => ThreadFile,
+    private readonly longestQueue = mostWaiting,
+  ) {}
+
+  ask(question: Question): Promise<Answer> {
+    if (this.waiting.length >= this.longestQueue)
+      return Promise.reject(new Rejection('unavailable', 'problem-busy', { retryAfter_seconds }));
+    return new Promise((resolve, reject) => {
+      this.waiting.push({ question, resolve, reject });
+      this.next();
+    });
+  }
+
+  private next(): void {
+    if (this.running) return;
+    this.running = this.waiting.shift();
+    if (!this.running) return this.rest();
+    clearTimeout(this.idle);
+    this.thread ??= this.begin();
+    this.thread.ref();
+    this.thread.postMessage(this.running.question);
+  }
+
+  private begin(): Worker {
+    const { file, options } = this.start();
+    const thread = new Worker(file, options);
+    thread.on('message', (reply: ThreadReply<Answer>) => this.settle(reply));
+    thread.on('error', (error) => this.lose(thread, error));
+    thread.on('exit', () => this.lose(thread, new Error('the thread ended before it had answered')));
+    return thread;
+  }
+
+  private settle(reply: ThreadReply<Answer>): void {
+    const { running } = this;
+    this.running = undefined;
+    if ('answer' in reply) running?.resolve(reply.answer);
+    else running?.reject(new Error(reply.error));
+    this.next();
+  }
+
+  private lose(thread: Worker, error: Error): void {
+    if (this.thread !== thread) return;
+    this.thread = undefined;
+    if (this.running) this.settle({ error: error.message });
+  }
+
+  /** Nothing to do: the process may end, and after a while the thread does. */
+  private rest(): void {
+    const { thread } = this;
+    thread?.unref();
+    this.idle = setTimeout(() => {
+      if (this.running || this.thread !== thread) return;
+      this.thread = undefined;
+      void thread?.terminate();
+    }, idle_milliseconds);
+    this.idle.unref();
+  }
+}
