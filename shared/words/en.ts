@@ -1,4 +1,5 @@
 import { accounts } from '#shared/words/en/accounts';
+import { agreements } from '#shared/words/en/agreements';
 import { buildups } from '#shared/words/en/buildups';
 import { cardChoices } from '#shared/words/en/card-choices';
 import { cardTables } from '#shared/words/en/card-tables';
@@ -34,4 +35,5 @@ export const en = {
   ...jobs,
   ...estimates,
   ...documents,
+  ...agreements,
 } as const;

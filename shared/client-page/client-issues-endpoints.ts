@@ -1,0 +1,116 @@
+import * as z from 'zod';
+import { choiceSchema } from '#shared/agreements/choice-schema';
+import { questionSchema, questionText } from '#shared/agreements/question-schema';
+import { endpoint } from '#shared/actor/endpoint';
+import { clientDecisionSchema, clientIssueSchema } from '#shared/client-page/client-issue-schema';
+import { clientOverviewSchema } from '#shared/client-page/client-overview-schema';
+import { clientPriceSchema, clientReviewSchema } from '#shared/client-page/client-price-schema';
+import { identifier, line, paragraphs } from '#shared/problems/entry-schema';
+
+const oneIssue = z.strictObject({ issueId: identifier });
+const choosing = z.strictObject({ choice: choiceSchema });
+
+export const readClientOverview = endpoint({
+  name: 'readClientOverview',
+  summary: 'The jobs a client may see, with their issues and where these stand, and what is owed',
+  method: 'get',
+  path: '/api/client/overview',
+  callers: 'client',
+  answers: { public: clientOverviewSchema },
+});
+
+export const readClientLogo = endpoint({
+  name: 'readClientLogo',
+  summary: 'The picture of the workshop’s letterhead',
+  method: 'get',
+  path: '/api/client/logo',
+  callers: 'client',
+  media: 'image/png',
+  answers: { public: z.unknown() },
+});
+
+export const readClientIssue = endpoint({
+  name: 'readClientIssue',
+  summary: 'An issue as its client reads it, with all that was asked about the job',
+  method: 'get',
+  path: '/api/client/issues/:issueId',
+  callers: 'client',
+  params: oneIssue,
+  answers: { public: clientIssueSchema },
+});
+
+export const priceClientChoice = endpoint({
+  name: 'priceClientChoice',
+  summary: 'What an issue comes to with these alternatives',
+  method: 'post',
+  path: '/api/client/issues/:issueId/prices',
+  callers: 'client',
+  params: oneIssue,
+  body: choosing,
+  answers: { public: clientPriceSchema },
+});
+
+export const reviewClientChoice = endpoint({
+  name: 'reviewClientChoice',
+  summary:
+    'The last look before accepting: what the choice comes to, and the SHA-256 of the paper that would be accepted',
+  method: 'post',
+  path: '/api/client/issues/:issueId/review',
+  callers: 'client',
+  params: oneIssue,
+  body: choosing,
+  answers: { public: clientReviewSchema },
+});
+
+export const readClientPaper = endpoint({
+  name: 'readClientPaper',
+  summary:
+    'The paper of an issue with these alternatives (their ids, commas between); of one that was accepted, the very paper accepted',
+  method: 'get',
+  path: '/api/client/issues/:issueId/estimate.pdf',
+  callers: 'client',
+  params: oneIssue,
+  query: z.strictObject({ choice: z.string().max(1000).default('') }),
+  media: 'application/pdf',
+  answers: { public: z.unknown() },
+});
+
+export const askClientQuestion = endpoint({
+  name: 'askClientQuestion',
+  summary: 'Ask the workshop about an issue',
+  method: 'post',
+  path: '/api/client/issues/:issueId/questions',
+  callers: 'client',
+  params: oneIssue,
+  body: z.strictObject({ text: questionText }),
+  answers: { public: questionSchema },
+});
+
+export const acceptIssue = endpoint({
+  name: 'acceptIssue',
+  summary: 'Accept an issue with these alternatives, at the price and on the paper that were reviewed',
+  method: 'post',
+  path: '/api/client/issues/:issueId/acceptance',
+  callers: 'client',
+  params: oneIssue,
+  body: z.strictObject({
+    typedName: line(120),
+    agrees: z.literal(true),
+    choice: choiceSchema,
+    gross_minor: z.int(),
+    pdfSha256: z.string().regex(/^[0-9a-f]{64}$/),
+  }),
+  idempotent: true,
+  answers: { public: clientDecisionSchema },
+});
+
+export const declineIssue = endpoint({
+  name: 'declineIssue',
+  summary: 'Decline an issue, and say why',
+  method: 'post',
+  path: '/api/client/issues/:issueId/refusal',
+  callers: 'client',
+  params: oneIssue,
+  body: z.strictObject({ reason: paragraphs(2000) }),
+  answers: { public: clientDecisionSchema },
+});

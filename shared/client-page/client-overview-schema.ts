@@ -1,0 +1,48 @@
+import * as z from 'zod';
+import { clientLetterheadSchema } from '#shared/client-page/client-letterhead-schema';
+
+/** Where an issue stands for its client: `open` may be accepted. */
+export const clientIssueStates = ['open', 'accepted', 'declined', 'replaced', 'past-validity'] as const;
+export type ClientIssueState = (typeof clientIssueStates)[number];
+
+/** An issue in a list. */
+export const clientIssueSummarySchema = z.strictObject({
+  id: z.uuid(),
+  kind: z.enum(['estimate', 'variation']),
+  number: z.string(),
+  letter: z.string(),
+  title: z.string(),
+  state: z.enum(clientIssueStates),
+  issuedOn: z.string(),
+  validUntil: z.string(),
+  gross_minor: z.int(),
+});
+
+/** An invoice in a list, with what is still owed on it. */
+export const clientInvoiceSummarySchema = z.strictObject({
+  id: z.uuid(),
+  jobId: z.uuid().nullable(),
+  number: z.string(),
+  issuedOn: z.string(),
+  dueOn: z.string(),
+  due_minor: z.int(),
+  open_minor: z.int(),
+  currency: z.string(),
+});
+export type ClientInvoiceSummary = z.infer<typeof clientInvoiceSummarySchema>;
+
+/** All a client may come to from here. */
+export const clientOverviewSchema = z.strictObject({
+  letterhead: clientLetterheadSchema,
+  client: z.strictObject({ name: z.string() }),
+  jobs: z.array(
+    z.strictObject({
+      id: z.uuid(),
+      number: z.string(),
+      title: z.string(),
+      issues: z.array(clientIssueSummarySchema),
+    }),
+  ),
+  invoices: z.array(clientInvoiceSummarySchema),
+});
+export type ClientOverview = z.infer<typeof clientOverviewSchema>;

@@ -1,0 +1,24 @@
+import * as z from 'zod';
+import { endpoint } from '#shared/actor/endpoint';
+import { emailAddress } from '#shared/problems/entry-schema';
+
+export const beginClientVisit = endpoint({
+  name: 'beginClientVisit',
+  summary:
+    'Begin a visit with the secret of a mailed link; the answer holds the token that changing requests must carry',
+  method: 'post',
+  path: '/api/client/visits',
+  callers: 'anyone',
+  body: z.strictObject({ token: z.string().min(1).max(200) }),
+  answers: { public: z.strictObject({ token: z.string() }) },
+});
+
+export const askForClientSignIn = endpoint({
+  name: 'askForClientSignIn',
+  summary: 'Ask for a link to all of one’s papers by mail; the answer is the same whether the address is known or not',
+  method: 'post',
+  path: '/api/client/sign-in-letters',
+  callers: 'anyone',
+  body: z.strictObject({ email: emailAddress }),
+  answers: {},
+});
