@@ -1,5 +1,6 @@
-import type { BuildUp, BuildUpStep, StepKind, System } from '#shared/buildups/buildup';
+import type { BuildUpStep, StepKind, System } from '#shared/buildups/buildup';
 import type { BuildUpCard } from '#shared/buildups/buildup-card';
+import { lotIdOf } from '#shared/buildups/lot-id';
 import { setUpDays } from '#shared/buildups/set-up-days';
 import type { StepHours } from '#shared/buildups/step-hours';
 import { systemRank } from '#shared/buildups/system-order';
@@ -23,9 +24,11 @@ export interface LotStep {
   readonly reasons: readonly Reason[];
 }
 
-/** What is coated together: the zones of one piece with the same build-up. Its id is the piece's and the build-up's. */
+/** What is coated together: zones of one piece with the same build-up, all of them or those whose members name the same lot. */
 export interface LotWork {
   readonly id: string;
+  /** As its members name it; empty where it is the proposed one. */
+  readonly name: string;
   readonly pieceId: string;
   readonly buildUpId: string;
   readonly system: System;
@@ -66,35 +69,32 @@ function lotStep(step: BuildUpStep, parts: readonly StepHours[], card: BuildUpCa
   ];
 }
 
-function lotOf(buildUp: BuildUp, zones: readonly ZoneOfLot[], card: BuildUpCard): LotWork {
+function lotOf(zones: readonly ZoneOfLot[], card: BuildUpCard): LotWork[] {
+  const [first] = zones;
+  const buildUp = card.buildUps.find((known) => known.id === first?.facts.buildUpId);
+  if (!first || !buildUp) return [];
   const parts = groupedBy(
     zones.flatMap((zone) => zone.handsOn.steps),
     (part) => part.stepId,
   );
   const steps = buildUp.steps.flatMap((step) => lotStep(step, parts.get(step.id) ?? [], card));
-  const pieceId = zones[0]?.facts.pieceId ?? '';
-  return {
-    id: `${pieceId}/${buildUp.id}`,
-    pieceId,
-    buildUpId: buildUp.id,
-    system: buildUp.system,
+  const { pieceId, lot: name } = first.facts;
+  const { id: buildUpId, system } = buildUp;
+  const lot = {
+    ...{ id: lotIdOf(first.facts), name, pieceId, buildUpId, system },
     zoneIds: zones.map((zone) => zone.facts.id),
     steps,
     setUp_hours: steps.reduce((sum, step) => sum + step.setUp_hours, 0),
   };
+  return [lot];
 }
 
-const keyOf = ({ facts }: ZoneOfLot): string => JSON.stringify([facts.pieceId, facts.buildUpId]);
-
 /**
- * The lots of an estimate with their hours: zones of one piece and one build-up together, pieces in the order given, within a piece water first,
- * oil after it. Zones whose build-up the card does not hold are left out (`zoneHandsOn` says so).
+ * The lots of an estimate with their hours: zones of one piece, one build-up and one name of a lot together, pieces in the order given, within a
+ * piece all water first, oil after it. Zones whose build-up the card does not hold are left out (`zoneHandsOn` says so).
  */
 export function lotsOfZones(zones: readonly ZoneOfLot[], card: BuildUpCard): LotWork[] {
-  const lots = [...groupedBy(zones, keyOf).values()].flatMap((group) => {
-    const buildUp = card.buildUps.find((known) => known.id === group[0]?.facts.buildUpId);
-    return buildUp ? [lotOf(buildUp, group, card)] : [];
-  });
+  const lots = [...groupedBy(zones, ({ facts }) => lotIdOf(facts)).values()].flatMap((group) => lotOf(group, card));
   const pieces = new Set(zones.map(({ facts }) => facts.pieceId));
   const byPiece = groupedBy(lots, (lot) => lot.pieceId);
   return [...pieces].flatMap((pieceId) =>

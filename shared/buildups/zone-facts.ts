@@ -22,6 +22,8 @@ export interface ZoneFacts {
   readonly id: string;
   readonly pieceId: string;
   readonly buildUpId: string;
+  /** The lot its member names to be coated with; empty follows piece and build-up. */
+  readonly lot: string;
   /** Plan area (net, before relief) for hands-on work, and true area (with relief) for materials. */
   readonly plan_mm2: number;
   readonly true_mm2: number;

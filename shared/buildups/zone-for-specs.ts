@@ -5,6 +5,7 @@ export const zoneForSpecs = (given: Partial<ZoneFacts>): ZoneFacts => ({
   id: 'zone',
   pieceId: 'piece',
   buildUpId: 'water-burnished',
+  lot: '',
   plan_mm2: 1e6,
   true_mm2: 1e6,
   finish: 'plain',

@@ -8,7 +8,7 @@ const layer = (stepId: string, coats: number, thickness = coats) => ({
 
 const zone = (zoneId: string, buildUp: string, layers: ReturnType<typeof layer>[]): ZoneFigures => ({
   ...{ zoneId, buildUp, layers, memberId: 'member', finish: 'plain', plan_mm2: 0, true_mm2: 0, ground_mm: 0 },
-  ...{ hours: { low: 0, likely: 0, high: 0 }, steps: [], leaf: null, reasons: [] },
+  ...{ hours: { low: 0, likely: 0, high: 0 }, steps: [], leaf: null, recutting: null, reasons: [] },
 });
 
 describe('the build-ups of an estimate', () => {

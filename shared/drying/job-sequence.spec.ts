@@ -182,6 +182,52 @@ describe('lots laid into a working week', () => {
     ]);
   });
 
+  it('tells from when to when each approval is waited for, and leaves out one that takes no time', () => {
+    const holds_days = { ...noHolds, 'carving-approved': 2, 'sample-approved': 5 };
+    const size = step('size', 60, { holds: ['carving-approved', 'top-dry-fitted'] });
+    const lots = [lot('a', [size, step('bole', 60, { holds: ['sample-approved'] })])];
+    // Asked on Tuesday morning, answered by Wednesday evening; a sample shown on Monday is answered by Friday evening.
+    expect(plan(lots, { holds_days, ready_minutes: { a: day } }).holds).toEqual([
+      {
+        lotId: 'a',
+        stepId: 'size',
+        hold: 'carving-approved',
+        from_minutes: day,
+        to_minutes: 2 * day + evening,
+        usual_days: 2,
+      },
+      {
+        lotId: 'a',
+        stepId: 'bole',
+        hold: 'sample-approved',
+        from_minutes: 0,
+        to_minutes: 4 * day + evening,
+        usual_days: 5,
+      },
+    ]);
+  });
+
+  it('law: no step begins before what it waits for is over', () => {
+    const days = fc.integer({ min: 0, max: 9 });
+    fc.assert(
+      fc.property(days, days, fc.nat(9 * day), (carving, sample, ready) => {
+        const holds_days = { ...noHolds, 'carving-approved': carving, 'sample-approved': sample };
+        const lots = [
+          lot('a', [
+            step('size', 60, { holds: ['carving-approved'] }),
+            step('bole', 60, { holds: ['sample-approved'] }),
+          ]),
+        ];
+        const job = plan(lots, { holds_days, ready_minutes: { a: ready } });
+        expect(job.holds).toHaveLength([carving, sample].filter((wait) => wait > 0).length);
+        for (const hold of job.holds) {
+          const begun = job.tasks.find((task) => task.step.stepId === hold.stepId)?.start_minutes;
+          expect(begun).toBeGreaterThanOrEqual(hold.to_minutes);
+        }
+      }),
+    );
+  });
+
   it('keeps oily size away until gilding in water is burnished and its edge protected', () => {
     const water = lot(
       'w',

@@ -29,10 +29,21 @@ export interface LotSpan extends Span {
   readonly waiting_minutes: number;
 }
 
+/** A wait for somebody: from when they can be asked until they have usually answered, before a step of a lot. */
+export interface PlacedHold {
+  readonly lotId: string;
+  readonly stepId: string;
+  readonly hold: HoldPoint;
+  readonly from_minutes: number;
+  readonly to_minutes: number;
+  readonly usual_days: number;
+}
+
 /** A job in elapsed minutes from the start of work on the first day of a week; no dates. */
 export interface JobSequence {
   readonly tasks: readonly PlacedTask[];
   readonly lots: readonly LotSpan[];
+  readonly holds: readonly PlacedHold[];
   readonly elapsed_minutes: number;
   readonly elapsed_workingDays: number;
   readonly elapsed_weeks: number;
@@ -48,15 +59,27 @@ interface Plan {
 }
 
 /** A hold asked for at a moment is over after so many working days: a sample from the start of the job, the rest when the lot is ready. */
-function holdUntil(hold: HoldPoint, ready_minutes: number, { holds_days, time }: JobRequest): number {
-  const asked = nextWorkingMinute(hold === 'sample-approved' ? 0 : ready_minutes, time);
-  return endOfWork(asked, holds_days[hold] * time.day_minutes, time);
+function holdOf(hold: HoldPoint, ready_minutes: number, { holds_days, time }: JobRequest) {
+  const usual_days = holds_days[hold];
+  const from_minutes = nextWorkingMinute(hold === 'sample-approved' ? 0 : ready_minutes, time);
+  return { hold, from_minutes, to_minutes: endOfWork(from_minutes, usual_days * time.day_minutes, time), usual_days };
+}
+
+/** What the steps of a lot wait for; a step that waits for nobody, or for no time, is left out. */
+function holdsOf({ lotId, steps }: LotSequence, request: JobRequest): PlacedHold[] {
+  const ready = request.ready_minutes[lotId] ?? 0;
+  return steps.flatMap(({ stepId, holds }) =>
+    holds
+      .map((hold) => ({ lotId, stepId, ...holdOf(hold, ready, request) }))
+      .filter(({ usual_days }) => usual_days > 0),
+  );
 }
 
 function earliest(lot: LotSequence, at: { request: JobRequest; plan: Plan; placed: readonly PlacedCoat[] }) {
+  const waits = holdsOf(lot, at.request);
   const ready = at.request.ready_minutes[lot.lotId] ?? 0;
   return (step: SequenceStep): number => {
-    const holds = step.holds.map((hold) => holdUntil(hold, ready, at.request));
+    const holds = waits.filter(({ stepId }) => stepId === step.stepId).map(({ to_minutes }) => to_minutes);
     const lags = at.placed.flatMap((one) =>
       one.step.lags
         .filter((lag) => lag.toStepId === step.stepId)
@@ -124,6 +147,7 @@ export function jobSequence(request: JobRequest): JobSequence {
   return {
     tasks: plan.tasks,
     lots,
+    holds: request.lots.flatMap((lot) => holdsOf(lot, request)),
     elapsed_minutes,
     elapsed_workingDays: workingDaysUntil(elapsed_minutes, request.time),
     elapsed_weeks: elapsed_minutes / (7 * dayLength_minutes),

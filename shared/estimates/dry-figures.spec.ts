@@ -52,6 +52,51 @@ describe('The days of an estimate', () => {
     expect(Number(first?.start_minutes)).toBeLessThan(Number(second?.start_minutes));
   });
 
+  it('keep oil size from what is gilt in water on the same piece, whatever lots its members are put into', () => {
+    const zones = (id: string) => [
+      zoneOf(`${id} water`, { take: { way: 'share', share_percent: 50 } }),
+      zoneOf(`${id} oil`, { take: { way: 'share', share_percent: 50 }, buildUpId: 'oil-3-hour' }),
+    ];
+    for (const lots of [
+      ['', ''],
+      ['Leg', ''],
+      ['Leg', 'Foot'],
+      ['Leg', 'Leg'],
+    ]) {
+      const members = lots.map((lot, at) => memberForSpecs({ id: `member ${at}`, lot, zones: zones(String(at)) }));
+      const { dry } = dryOf(members);
+      const startsOf = (stepIds: readonly string[], system: RegExp) =>
+        dry.tasks.filter(({ lotId, stepId }) => system.test(lotId) && stepIds.includes(stepId));
+      const burnished = startsOf(['burnish'], /water-burnished/).map(({ end_minutes }) => end_minutes);
+      const sized = startsOf(['size'], /oil-3-hour/).map(({ start_minutes }) => start_minutes);
+      expect(dry.lots).toHaveLength(2 * new Set(lots).size);
+      expect([burnished.length > 0, sized.length > 0]).toEqual([true, true]);
+      expect(Math.min(...sized)).toBeGreaterThanOrEqual(Math.max(...burnished));
+    }
+  });
+
+  it('have a member in a lot of its own begun when it is carved, without waiting for the others', () => {
+    const carved = (id: string, count: number, lot: string) =>
+      memberForSpecs({ id, lot, zones: [zoneOf(`${id} face`)], ornaments: [shells(count, `${id} face`)] });
+    const startOf = (lot: string, lotId: string) =>
+      dryOf([carved('small', 1, lot), carved('large', 9, '')]).dry.lots.find((one) => one.lotId === lotId)
+        ?.start_minutes;
+    const [together, apart] = [startOf('', 'piece/water-burnished'), startOf('Lid', 'piece/water-burnished/Lid')];
+    expect(apart).toBeLessThan(Number(together));
+  });
+
+  it('tell each approval that is waited for, with its usual days', () => {
+    const { dry } = dryOf([memberForSpecs({ zones: [zoneOf('face')] })]);
+    // Nothing is carved, so all are asked for on the first morning; a week of five days has eight hours a day.
+    expect(dry.holds.map(({ hold, stepId, usual_days, to_minutes }) => [hold, stepId, usual_days, to_minutes])).toEqual(
+      [
+        ['carving-approved', 'size-coat', 2, day + 8 * 60],
+        ['top-dry-fitted', 'size-coat', 1, 8 * 60],
+        ['sample-approved', 'yellow-bole', 5, 4 * day + 8 * 60],
+      ],
+    );
+  });
+
   it('are more in damp air', () => {
     const member = memberForSpecs({ zones: [zoneOf('face')] });
     expect(dryOf([member], 75).dry.elapsed_minutes).toBeGreaterThan(dryOf([member]).dry.elapsed_minutes);

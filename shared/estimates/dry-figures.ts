@@ -1,6 +1,6 @@
 import type { EstimateWork } from '#shared/estimates/estimate-work';
 import type { EstimateSettings } from '#shared/estimates/settings';
-import { jobSequence, type JobSequence, type LotSpan } from '#shared/drying/job-sequence';
+import { jobSequence, type JobSequence, type LotSpan, type PlacedHold } from '#shared/drying/job-sequence';
 import { lotSequence, type LotSequence } from '#shared/drying/lot-sequence';
 import { endOfWork } from '#shared/drying/end-of-work';
 import { woodMovement, type WoodMovement } from '#shared/drying/wood-movement';
@@ -26,9 +26,11 @@ export interface DryLot extends Omit<LotSequence, 'findings' | 'system'>, Omit<L
 }
 
 /** Hands-on and waiting time of the job as a sequence by lots; elapsed time, no dates. */
-export interface DryFigures extends Omit<JobSequence, 'tasks' | 'lots' | 'findings'> {
+export interface DryFigures extends Omit<JobSequence, 'tasks' | 'lots' | 'holds' | 'findings'> {
   readonly lots: readonly DryLot[];
   readonly tasks: readonly DryTask[];
+  /** Approvals that are waited for. */
+  readonly holds: readonly PlacedHold[];
   /** Carving before the first lot can be sized, one carver at work. */
   readonly carving_minutes: number;
   /** The week the work is laid into. */
@@ -101,6 +103,7 @@ export function dryFigures(
     tasks: job.tasks.map(({ lotId, step, coat, portion, start_minutes, end_minutes, handsOn_minutes }) => ({
       ...{ lotId, stepId: step.stepId, coat, portion, start_minutes, end_minutes, handsOn_minutes },
     })),
+    holds: job.holds,
   };
   return { dry, findings: [...sequences.flatMap((sequence) => sequence.findings), ...job.findings, ...wood.findings] };
 }

@@ -2,7 +2,7 @@ import type { MaterialBought } from '#shared/buildups/materials-bought';
 import type { RecipeBatch } from '#shared/buildups/recipe-batches';
 import type { StripLayer } from '#shared/buildups/section-strip';
 import type { StepHours } from '#shared/buildups/step-hours';
-import type { CarvingHoursRow, CarvingResult, UseHours } from '#shared/carving/carving-result';
+import type { CarvingHoursRow, CarvingResult, RecutHours, UseHours } from '#shared/carving/carving-result';
 import type { DryFigures } from '#shared/estimates/dry-figures';
 import type { PriceCost, PriceLines } from '#shared/estimates/price/price';
 import type { Risk } from '#shared/estimates/risk/risk';
@@ -65,6 +65,8 @@ export interface ZoneFigures {
   readonly steps: readonly Omit<StepHours, 'pattern' | 'perLaid_hours'>[];
   readonly layers: readonly StripLayer[];
   readonly leaf: ZoneLeafFigures | null;
+  /** Recutting in gesso, which is counted with the carving; null where the zone is not recut. */
+  readonly recutting: Pick<RecutHours, 'hours' | 'reasons'> | null;
   readonly reasons: readonly Reason[];
 }
 

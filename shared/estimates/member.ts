@@ -55,7 +55,7 @@ export interface MemberContent {
   readonly openings: readonly Opening[];
   readonly zones: readonly Zone[];
   readonly ornaments: readonly MemberOrnament[];
-  /** Name of the lot it is coated with; empty follows build-up and piece. */
+  /** Name of the lot it is coated with, whatever its build-ups; empty is coated with all of its piece that is built up alike. */
   readonly lot: string;
   readonly note: string;
   /** Lengths as they were typed, by the path of their field: what was written is what is shown again. */

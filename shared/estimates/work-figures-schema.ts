@@ -87,6 +87,7 @@ const zone = z.strictObject({
   steps: z.array(zoneStep),
   layers: z.array(layer),
   leaf: zoneLeaf.nullable(),
+  recutting: z.strictObject({ hours: triple, reasons }).nullable().default(null),
   reasons,
 });
 
@@ -205,9 +206,17 @@ const dry = z.strictObject({
       handsOn_minutes: figure,
     }),
   ),
+  holds: z
+    .array(
+      z.strictObject({
+        ...{ lotId: text, stepId: text, hold },
+        ...{ from_minutes: figure, to_minutes: figure, usual_days: figure },
+      }),
+    )
+    .default([]),
 });
 
-/** What the bench may see. */
+/** What the bench may see. Issues made before waits and recutting were told have none of them. */
 export const workFiguresSchema = z.strictObject({
   calculatorVersion: z.int(),
   tally: z.strictObject({

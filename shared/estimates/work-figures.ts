@@ -2,7 +2,7 @@ import { groundThickness } from '#shared/buildups/ground-thickness';
 import { recipeBatches } from '#shared/buildups/recipe-batches';
 import { sectionStrip } from '#shared/buildups/section-strip';
 import type { StepHours } from '#shared/buildups/step-hours';
-import type { UseHours } from '#shared/carving/carving-result';
+import type { RecutHours, UseHours } from '#shared/carving/carving-result';
 import { rowsTogether } from '#shared/carving/hours-of-kinds';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import { dryFigures } from '#shared/estimates/dry-figures';
@@ -78,7 +78,7 @@ function stepFigures({ stepId, kind, name, gradeId, coats, hours, reasons }: Ste
   return { stepId, kind, name, gradeId, coats, hours, reasons };
 }
 
-function zoneFigures(worked: WorkedZone, card: RateCard): ZoneFigures {
+function zoneFigures(worked: WorkedZone, recut: RecutHours | undefined, card: RateCard): ZoneFigures {
   const { zone, area, buildUp, facts } = worked;
   const metal = card.leaf.products.find((product) => product.id === zone.leafId)?.metal ?? null;
   return {
@@ -93,8 +93,14 @@ function zoneFigures(worked: WorkedZone, card: RateCard): ZoneFigures {
     steps: worked.handsOn.steps.map(stepFigures),
     layers: buildUp ? sectionStrip(buildUp, facts, metal) : [],
     leaf: zoneLeafFigures(worked, card),
+    recutting: recut ? { hours: recut.hours, reasons: recut.reasons } : null,
     reasons: area.reasons,
   };
+}
+
+function zonesFigures({ zones, carving }: EstimateWork, card: RateCard): ZoneFigures[] {
+  const recut = new Map(carving.recut.map((zone) => [zone.zoneId, zone]));
+  return zones.map((worked) => zoneFigures(worked, recut.get(worked.zone.id), card));
 }
 
 type MemberOfUse = ReadonlyMap<string, string>;
@@ -197,7 +203,7 @@ export function workFigures(work: EstimateWork, settings: EstimateSettings, card
     calculatorVersion,
     tally: { ...tallyOf(work, card, members), workingDays: dry.elapsed_workingDays, weeks: dry.elapsed_weeks },
     members,
-    zones: work.zones.map((zone) => zoneFigures(zone, card)),
+    zones: zonesFigures(work, card),
     uses: useFigures(work, memberOf, card),
     carving: carvingFigures(work, card),
     grades: gradeFigures(work, card),

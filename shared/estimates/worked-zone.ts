@@ -44,6 +44,7 @@ const factsOf = ({ zone, area, finish }: MeasuredZone, at: ZoneAt, { product, la
   id: zone.id,
   pieceId: at.measured.member.pieceId,
   buildUpId: zone.buildUpId,
+  lot: at.measured.member.lot,
   plan_mm2: area.plan_mm2,
   true_mm2: area.net_mm2,
   finish,

@@ -2,9 +2,19 @@ import { buildUpsUsed, type UsedBuildUp } from '#shared/documents/buildups-used'
 import type { DryLot } from '#shared/estimates/dry-figures';
 import type { UseFigures, ZoneFigures } from '#shared/estimates/figures';
 import type { Member, Piece } from '#shared/estimates/member';
+import { zonesOfLot } from '#shared/estimates/zones-of-lot';
 import type { Finding } from '#shared/words/finding';
 import type { BenchSheetRequest } from '../../estimates';
 import { paperWords, type PaperWords } from '../paper-words';
+
+/** A lot with its build-up drawn, what its members call it (empty: as proposed), and what is coated in it. */
+export interface BenchLot {
+  readonly lot: DryLot;
+  readonly used: UsedBuildUp | null;
+  readonly name: string;
+  readonly zones: readonly ZoneFigures[];
+  readonly members: readonly Member[];
+}
 
 /** One piece with everything worked on it, ready to be written for the bench. */
 export interface BenchContent {
@@ -14,7 +24,7 @@ export interface BenchContent {
   readonly members: readonly Member[];
   readonly zones: readonly ZoneFigures[];
   readonly uses: readonly UseFigures[];
-  readonly lots: readonly { readonly lot: DryLot; readonly used: UsedBuildUp | null }[];
+  readonly lots: readonly BenchLot[];
   readonly findings: readonly Finding[];
 }
 
@@ -33,6 +43,14 @@ function findingsOf(request: BenchSheetRequest, own: ReadonlySet<string>): Findi
   return request.figures.findings.filter(({ about }) => about === undefined || own.has(about) || !foreign.has(about));
 }
 
+function benchLot(lot: DryLot, own: Pick<BenchContent, 'members' | 'zones'>, used: readonly UsedBuildUp[]): BenchLot {
+  const coated = zonesOfLot(own.members, lot.lotId);
+  const zones = own.zones.filter(({ zoneId }) => coated.some(({ zone }) => zone.id === zoneId));
+  const members = own.members.filter(({ id }) => zones.some(({ memberId }) => memberId === id));
+  const name = members.at(0)?.lot ?? '';
+  return { lot, used: used.find((one) => one.buildUp === lot.buildUp) ?? null, name, zones, members };
+}
+
 /** Gathers a piece and its work; RangeError for a piece the draft does not hold. */
 export function benchContent(request: BenchSheetRequest): BenchContent {
   const { draft, figures, pieceId } = request;
@@ -48,7 +66,7 @@ export function benchContent(request: BenchSheetRequest): BenchContent {
   return {
     ...{ request, piece, members, zones, uses },
     words: paperWords(request.workshop),
-    lots: lots.map((lot) => ({ lot, used: used.find((one) => one.buildUp === lot.buildUp) ?? null })),
+    lots: lots.map((lot) => benchLot(lot, { members, zones }, used)),
     findings: findingsOf(request, new Set([...own, ...lots.map((lot) => lot.lotId)])),
   };
 }

@@ -5,14 +5,14 @@ import { figureRows, figureWidth } from '../paper/figure-rows';
 import type { Block } from '../paper/flow';
 import type { Pdf } from '../paper/open-paper';
 import { textStyles } from '../paper/paper-colours';
+import { textBlock } from '../paper/text-block';
 import { partBlocks, sectionBlocks } from '../paper/section-blocks';
 import { tableBlock, type TableRow } from '../paper/table-block';
-import type { BenchContent } from './bench-content';
+import type { BenchContent, BenchLot } from './bench-content';
 
 /** The fewest and most coats any zone of the lot gets of a step. */
-function coatsText({ zones, words }: BenchContent, lot: DryLot, step: SequenceStep): string {
-  const own = zones.filter((zone) => zone.buildUp === lot.buildUp);
-  const coats = own.flatMap((zone) =>
+function coatsText({ words }: BenchContent, { zones }: BenchLot, step: SequenceStep): string {
+  const coats = zones.flatMap((zone) =>
     zone.steps.filter(({ stepId }) => stepId === step.stepId).map((one) => one.coats),
   );
   const [fewest, most] = [Math.min(...coats), Math.max(...coats)];
@@ -53,12 +53,12 @@ function ruleTexts(step: SequenceStep, lot: DryLot, { words: { say } }: BenchCon
   ];
 }
 
-function stepRow(step: SequenceStep, lot: DryLot, content: BenchContent): TableRow {
+function stepRow(step: SequenceStep, own: BenchLot, content: BenchContent): TableRow {
   const { words } = content;
   return {
     cells: [
-      { text: step.name, note: ruleTexts(step, lot, content).join(' '), style: textStyles.medium, isRowHead: true },
-      { text: coatsText(content, lot, step) },
+      { text: step.name, note: ruleTexts(step, own.lot, content).join(' '), style: textStyles.medium, isRowHead: true },
+      { text: coatsText(content, own, step) },
       { text: step.handsOn_minutes === 0 ? '' : words.figure('hours', step.handsOn_minutes / 60) },
       { text: windowText(step, content) },
     ],
@@ -66,7 +66,7 @@ function stepRow(step: SequenceStep, lot: DryLot, content: BenchContent): TableR
   };
 }
 
-function stepsTable(pdf: Pdf, lot: DryLot, content: BenchContent): Block {
+function stepsTable(pdf: Pdf, own: BenchLot, content: BenchContent): Block {
   const { say } = content.words;
   const columns = [
     { head: say('bench-column-step'), width: 'rest' },
@@ -75,18 +75,21 @@ function stepsTable(pdf: Pdf, lot: DryLot, content: BenchContent): Block {
     { head: say('bench-column-next'), width: 150 },
   ] as const;
   // A step that takes no time and lets nothing wait is not done here.
-  const done = lot.steps.filter((step) => step.handsOn_minutes > 0 || step.opens_minutes > 0);
-  const rows = done.map((step) => stepRow(step, lot, content));
+  const done = own.lot.steps.filter((step) => step.handsOn_minutes > 0 || step.opens_minutes > 0);
+  const rows = done.map((step) => stepRow(step, own, content));
   return tableBlock(pdf, columns, rows);
 }
 
-function lotParts(pdf: Pdf, content: BenchContent, { lot, used }: BenchContent['lots'][number]): Block[] {
+function lotParts(pdf: Pdf, content: BenchContent, own: BenchLot): Block[] {
+  const { lot, used, name, members } = own;
   const width_pt = figureWidth(pdf, 2);
   const strip = used
     ? [{ figure: drawnStrip(pdf, used, { words: content.words, width_pt }), caption: '', note: '' }]
     : [];
-  const parts = [...figureRows(pdf, strip, 2), ...(lot.steps.length > 0 ? [stepsTable(pdf, lot, content)] : [])];
-  return partBlocks(pdf, lot.buildUp, parts);
+  const together = textBlock(pdf, members.map((member) => member.name).join(', '), { style: textStyles.note });
+  const steps = lot.steps.length > 0 ? [stepsTable(pdf, own, content)] : [];
+  const parts = [...figureRows(pdf, strip, 2), together, ...steps];
+  return partBlocks(pdf, [name, lot.buildUp].filter(Boolean).join(': '), parts);
 }
 
 /** What is coated together: the section of each build-up, its steps with coats, hands-on hours and windows in the shop's air. */

@@ -1,4 +1,5 @@
 import type { BuildUpStep } from '#shared/buildups/buildup';
+import type { LotWork } from '#shared/buildups/lot-works';
 import type { GildingPage } from './gilding-sheet';
 import type { GildingRates } from './gilding-rates';
 import { lotSteps, type NumberedStep } from './lot-steps';
@@ -25,6 +26,9 @@ export interface SetUpParts {
 const buildUpOf = ({ prepared }: WorkbookFacts, id: string) =>
   prepared.work.zones.find(({ buildUp }) => buildUp?.id === id)?.buildUp ?? null;
 
+const nameOf = (facts: WorkbookFacts, { name, buildUpId }: LotWork): string =>
+  [name, buildUpOf(facts, buildUpId)?.name ?? buildUpId].filter(Boolean).join(': ');
+
 /** A coat that dries a working day or longer is set up by itself. */
 function leastDays(step: BuildUpStep | undefined, coats: number, facts: WorkbookFacts): number {
   const day_minutes = facts.snapshot.card.buildUps.workingDay_hours * 60;
@@ -43,7 +47,7 @@ function setUpRow(
   const here = (column: number) => sheet.here(column, sheet.next);
   const days = `MAX(${countedUp(`${here(at.hours)}/(${rates.workingDay}*${rates.productive}/100)`)},${here(at.least)})`;
   const row = sheet.add([
-    ...[number, piece, buildUp?.name ?? lot.buildUpId, step.name, gradeNumber(facts, step.gradeId)],
+    ...[number, piece, nameOf(facts, lot), step.name, gradeNumber(facts, step.gradeId)],
     formula(gilding.hoursOfStep(number), step.hours),
     input(
       leastDays(
@@ -65,7 +69,7 @@ function lotRow(sheet: Sheet, place: number, { facts, parts }: { facts: Workbook
   const row = sheet.add([
     place + 1,
     null,
-    buildUpOf(facts, lot.buildUpId)?.name ?? lot.buildUpId,
+    nameOf(facts, lot),
     null,
     null,
     formula(parts.takeOff.lotPlan(place + 1), plan_m2),

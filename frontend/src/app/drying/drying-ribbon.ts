@@ -9,11 +9,14 @@ import {
   model,
   signal,
 } from '@angular/core';
+import { holdPoints } from '#shared/buildups/buildup';
 import { dayLength_minutes } from '#shared/drying/day-length-minutes';
 import type { WorkingTime } from '#shared/drying/working-time';
 import { Formats } from '../core/formats/formats';
+import { holdNames } from './hold-names';
 import { lotRibbon } from './lot-ribbon';
-import { closedBars, ribbonRow, ribbonTicks } from './ribbon-row';
+import { closedBars, holdRow, ribbonRow, ribbonTicks } from './ribbon-row';
+import type { WorkedHold } from './worked-hold';
 import type { WorkedLot } from './worked-lot';
 import { workingParts } from './working-parts';
 
@@ -26,6 +29,7 @@ const zooms: readonly { readonly zoom: Zoom; readonly name: string }[] = [
 ];
 
 const row_px = 64;
+const holdRow_px = 36;
 const head_px = 34;
 const names_px = 176;
 
@@ -45,12 +49,13 @@ export class DryingRibbon {
   readonly elapsed_minutes = input.required<number>();
   /** Carving before the first lot can be begun. */
   readonly carving_minutes = input(0);
+  /** Approvals that are waited for. */
+  readonly holds = input<readonly WorkedHold[]>([]);
   /** The lot whose steps are told below. */
   readonly chosen = model<string>();
 
   protected readonly zooms = zooms;
   protected readonly zoom = signal<Zoom>('job');
-  protected readonly row_px = row_px;
   protected readonly days = computed(() =>
     Math.max(1, Math.ceil(Math.max(this.elapsed_minutes(), this.carving_minutes()) / dayLength_minutes)),
   );
@@ -60,15 +65,20 @@ export class DryingRibbon {
   });
 
   protected readonly width = computed(() => this.days() * this.day_px());
+  private readonly scale = computed(() => ({ day_px: this.day_px(), width_px: this.width() }));
   protected readonly rows = computed(() => {
     const lots = this.lots().map((lot) => ({
-      key: lot.lotId,
-      name: lot.name,
-      ...ribbonRow(lotRibbon(lot, this.time()), this.day_px()),
+      ...{ key: lot.lotId, name: lot.name, height: row_px },
+      ...ribbonRow(lotRibbon(lot, this.time()), this.scale()),
     }));
-    return [...this.carving(), ...lots].map((row, index) => ({ ...row, y: head_px + index * row_px }));
+    let below = head_px;
+    return [...this.carving(), ...this.approvals(), ...lots].map((row) => {
+      const y = below;
+      below += row.height;
+      return { ...row, y };
+    });
   });
-  protected readonly height = computed(() => head_px + this.rows().length * row_px);
+  protected readonly height = computed(() => this.rows().reduce((sum, row) => sum + row.height, head_px));
   protected readonly closed = computed(() => closedBars(this.days(), this.time(), this.day_px()));
   protected readonly ticks = computed(() =>
     ribbonTicks(this.days(), this.day_px()).map((tick) => ({ ...tick, text: this.tickText(tick.day) })),
@@ -94,6 +104,15 @@ export class DryingRibbon {
     if (to_minutes <= 0) return [];
     const name = $localize`Carving`;
     const work = workingParts({ from_minutes: 0, to_minutes }, this.time()).map((part) => ({ ...part, label: '' }));
-    return [{ key: '', name, ...ribbonRow({ work, drying: [], windows: [] }, this.day_px()) }];
+    return [{ key: '', name, height: row_px, ...ribbonRow({ work, drying: [], windows: [] }, this.scale()) }];
+  }
+
+  /** A row for each kind of approval that is waited for. */
+  private approvals() {
+    return holdPoints.flatMap((hold) => {
+      const own = this.holds().filter((one) => one.hold === hold);
+      if (own.length === 0) return [];
+      return [{ key: '', name: holdNames[hold], height: holdRow_px, ...holdRow(own, this.scale()) }];
+    });
   }
 }

@@ -1,6 +1,6 @@
 import type { SequenceStep } from '#shared/drying/sequence-step';
 import { lotRibbon } from './lot-ribbon';
-import { closedBars, ribbonRow, ribbonTicks } from './ribbon-row';
+import { closedBars, holdRow, ribbonRow, ribbonTicks } from './ribbon-row';
 import type { WorkedLot, WorkedTask } from './worked-lot';
 import { closedTimes, workingParts } from './working-parts';
 
@@ -84,10 +84,23 @@ describe('The ribbon as it is drawn', () => {
   }));
 
   it('names only what there is room for, and keeps the shortest work visible', () => {
-    const row = ribbonRow({ work, drying: [], windows: [] }, 24);
+    const row = ribbonRow({ work, drying: [], windows: [] }, { day_px: 24, width_px: 240 });
     expect(row.labels).toEqual([{ x: 0, text: 'Gesso' }]);
     expect(row.work.map(({ width }) => width)).toEqual([1.5, 1.5, 1.5, 1.5]);
-    expect(ribbonRow({ work, drying: [], windows: [] }, 2400).labels).toHaveLength(4);
+    expect(ribbonRow({ work, drying: [], windows: [] }, { day_px: 2400, width_px: 9600 }).labels).toHaveLength(4);
+  });
+
+  it('sets a name back that would be cut off at the right edge', () => {
+    const late = [{ from_minutes: 9 * day, to_minutes: 9 * day + hour, label: 'Second laying' }];
+    const { labels } = ribbonRow({ work: late, drying: [], windows: [] }, { day_px: 24, width_px: 240 });
+    // Thirteen letters of 7 px end at 240 px.
+    expect(labels).toEqual([{ x: 149, text: 'Second laying' }]);
+  });
+
+  it('draws a wait for somebody from when they are asked until they have usually answered', () => {
+    const wait = { hold: 'carving-approved', usual_days: 2, waiting: [] } as const;
+    const row = holdRow([{ ...wait, from_minutes: day, to_minutes: 3 * day }], { day_px: 24, width_px: 240 });
+    expect(row.holds).toEqual([{ x: 24, width: 48 }]);
   });
 
   it('numbers every day where it can, else the first of each week', () => {

@@ -160,6 +160,56 @@ describe('The places of work', () => {
       expect(element.querySelector('app-zone-form')).toBeNull();
     });
 
+    it('shows the hours of recutting beside the hands-on hours, and why', async () => {
+      const { element, entry, settle } = await open(GildPage);
+      expect(element.querySelector('app-zone-section')?.textContent).not.toContain('Recutting');
+      const recut = entry('Recut in gesso');
+      recut.selectedIndex = [...recut.options].findIndex(({ text }) => text === 'recut as usual');
+      recut.dispatchEvent(new Event('change'));
+      await settle();
+      const figure = [...element.querySelectorAll('app-zone-section div')].find((one) =>
+        one.textContent?.includes('Recutting'),
+      );
+      // Nothing carved on 0.06 m²: 8 h a square metre, a house value.
+      expect(figure?.querySelector('dd')?.textContent?.trim().replace(/\s/g, ' ')).toBe('0.48 h');
+      figure?.querySelector('button')?.click();
+      await settle();
+      expect(element.querySelector('app-reason-panel')?.textContent).toContain('a square metre');
+    });
+
+    it('takes old work on from the whole job, says what that does, and takes it back', async () => {
+      const { element, member, settle, store } = await open(GildPage);
+      member.next(null);
+      await settle();
+      const told = () => element.querySelector('app-restoration-form')?.textContent?.replace(/[\s\u00a0]+/g, ' ') ?? '';
+      const tick = () => element.querySelector('app-restoration-form input') as HTMLInputElement;
+      expect(told()).not.toContain('lead');
+      tick().click();
+      await settle();
+      expect(store.settings()?.restoration).toBe(true);
+      // The one zone there is, 1000 × 60 mm.
+      expect(told()).toContain('600 cm² in plan, zones: 1 of 1');
+      expect(told()).toContain('Cleaning and consolidating come with “Ingilding and local repair”.');
+      store.undo();
+      await settle();
+      expect([store.settings()?.restoration, tick().checked, told().includes('lead')]).toEqual([false, false, false]);
+    });
+
+    it('counts the hours of old work where a zone is cleaned and consolidated', async () => {
+      const { element, entry, member, settle, store } = await open(GildPage);
+      store.changeSettings({ restoration: true });
+      const build = entry('Build-up');
+      build.value = 'local-repair';
+      build.dispatchEvent(new Event('change'));
+      member.next(null);
+      await settle();
+      const told = element.querySelector('app-restoration-form')?.textContent?.replace(/[\s\u00a0]+/g, ' ');
+      // 8 h a square metre each on 0.06 m².
+      expect(told).toContain('Cleaning0.48 h');
+      expect(told).toContain('Consolidating0.48 h');
+      expect(told).not.toContain('come with');
+    });
+
     it('lays a build-up on a zone and on a bare member in one step that can be undone', async () => {
       const { store } = await open(GildPage);
       const spread = TestBed.inject(ZoneSpread);
@@ -177,7 +227,7 @@ describe('The places of work', () => {
   describe('Dry', () => {
     it('tells lots, steps and batches, and lays them anew in another air', async () => {
       const { element, rows, store, type } = await open(DryPage);
-      expect(rows()[0]?.[0]).toBe('Water gilding, burnished');
+      expect(rows()[0]?.[0]).toBe('Water gilding, burnished Top edge');
       expect(element.querySelector('app-lot-steps')?.textContent).toContain('Gesso');
       expect(element.querySelector('app-batch-list')?.textContent).toContain('Dry glue');
       const before = store.figures()?.dry.elapsed_minutes ?? 0;
@@ -186,6 +236,83 @@ describe('The places of work', () => {
       expect(store.figures()?.dry.elapsed_minutes).toBeGreaterThan(before);
       // Wood at 20 °C and 80 % rests at 16.0 % (Wood Handbook, Table 4-2), far from the 8 to 9 % of a dry room.
       expect(element.textContent).toContain('points apart');
+    });
+
+    describe('lots', () => {
+      const openTwo = async (roles: readonly Role[] = ['estimator']) => {
+        const place = await open(DryPage, roles);
+        if (!roles.includes('estimator')) return { ...place, lots: () => [], choose: () => Promise.resolve() };
+        const leg = place.store.members().find((one) => one.id === ids.leg);
+        if (!leg) throw new Error('there is no leg');
+        const { id: _id, ...content } = leg;
+        place.store.changeMember(ids.leg, { ...content, zones: [zone({ id: id(30), name: 'All of it' })] });
+        await place.settle();
+        const lots = () =>
+          place
+            .rows()
+            .map(([name]) => name)
+            .filter((name) => name?.startsWith('Legs') || name?.includes('gilding'));
+        const choose = async (memberName: string, label: string) => {
+          const line = [...place.element.querySelectorAll('app-lot-members li')].find((one) =>
+            one.textContent?.includes(memberName),
+          );
+          const select = line?.querySelector('select') as HTMLSelectElement;
+          select.selectedIndex = [...select.options].findIndex(({ text }) => text.trim() === label);
+          select.dispatchEvent(new Event('change'));
+          await place.settle();
+        };
+        return { ...place, lots, choose };
+      };
+      const handsOn = (store: EstimateStore) =>
+        (store.figures()?.dry.lots ?? []).reduce((sum, lot) => sum + lot.handsOn_minutes, 0);
+
+      it('coats a member on its own, renames its lot, and goes back to the proposal, each to be undone', async () => {
+        const { choose, entry, lots, press, settle, store } = await openTwo();
+        expect(lots()).toEqual(['Water gilding, burnished Top edge, Leg']);
+        const before = handsOn(store);
+        await choose('Leg', 'on its own');
+        expect(lots()).toEqual(['Water gilding, burnished Top edge', 'Leg: Water gilding, burnished Leg']);
+        // Ten steps and more of the second lot are set up for themselves, 24 minutes each.
+        expect(handsOn(store) - before).toBeGreaterThanOrEqual(10 * 24);
+        store.undo();
+        await settle();
+        expect([lots().length, handsOn(store)]).toEqual([1, before]);
+        store.redo();
+        await settle();
+        await choose('Top edge', 'in “Leg”');
+        expect(lots()).toEqual(['Leg: Water gilding, burnished Top edge, Leg']);
+        entry('Name of the lot').value = 'Frame';
+        entry('Name of the lot').dispatchEvent(new Event('change'));
+        await settle();
+        expect(lots()).toEqual(['Frame: Water gilding, burnished Top edge, Leg']);
+        await press('Back to the proposal');
+        expect(store.members().map(({ lot }) => lot)).toEqual(['', '']);
+        expect(handsOn(store)).toBe(before);
+      });
+
+      it('brings a member in that is built up alike', async () => {
+        const { choose, entry, lots, settle } = await openTwo();
+        await choose('Leg', 'on its own');
+        const bring = entry('Bring in');
+        bring.value = ids.leg;
+        bring.dispatchEvent(new Event('change'));
+        await settle();
+        expect(lots()).toEqual(['Water gilding, burnished Top edge, Leg']);
+      });
+
+      it('tells the bench what is coated together and offers nothing to change', async () => {
+        const { element, rows } = await openTwo(['bench']);
+        expect(rows()[0]?.[0]).toBe('Water gilding, burnished Top edge');
+        expect(element.querySelector('app-lot-members')).toBeNull();
+      });
+    });
+
+    it('draws approvals in the ribbon and tells them in a table', async () => {
+      const { element } = await open(DryPage);
+      const names = [...element.querySelectorAll('app-drying-ribbon .names li')].map((one) => one.textContent?.trim());
+      expect(names).toEqual(expect.arrayContaining(['Carving approved', 'Sample board approved', 'Top fitted dry']));
+      expect(element.querySelectorAll('app-drying-ribbon rect.hold')).toHaveLength(3);
+      expect(element.querySelector('app-hold-table')?.textContent).toContain('5 working days');
     });
 
     it('says once, beside the air, where nothing dries', async () => {

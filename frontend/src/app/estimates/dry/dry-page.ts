@@ -2,7 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@a
 import { Router } from '@angular/router';
 import { BatchList } from '../../buildups';
 import { Formats } from '../../core/formats/formats';
-import { DryingRibbon, JointMovement, LotSteps } from '../../drying';
+import { DryingRibbon, HoldTable, JointMovement, LotSteps } from '../../drying';
 import { ReasonPanel } from '../../ui/figure/reason-panel';
 import { EmptyState } from '../../ui/page/empty-state';
 import { FindingList } from '../../ui/page/finding-list';
@@ -11,6 +11,7 @@ import { PlaceExplanation } from '../places/place-explanation';
 import { AirForm } from './air-form';
 import { DryCautions } from './dry-cautions';
 import { DryLots } from './dry-lots';
+import { LotMembers } from './lot-members';
 import { LotTable } from './lot-table';
 import { WoodMoisture } from './wood-moisture';
 
@@ -23,7 +24,9 @@ import { WoodMoisture } from './wood-moisture';
     DryingRibbon,
     EmptyState,
     FindingList,
+    HoldTable,
     JointMovement,
+    LotMembers,
     LotSteps,
     LotTable,
     ReasonPanel,

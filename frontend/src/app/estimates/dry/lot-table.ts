@@ -1,10 +1,10 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, model } from '@angular/core';
-import { dayOf } from '#shared/drying/day-length-minutes';
+import { dayLength_minutes, dayOf } from '#shared/drying/day-length-minutes';
 import { Formats } from '../../core/formats/formats';
-import type { WorkedLot } from '../../drying';
 import type { FigureColumn } from '../../ui/table/figure-column';
 import { FigureTable } from '../../ui/table/figure-table';
 import { smallScreen } from '../../ui/screen/small-screen';
+import type { ShownLot } from './dry-lots';
 
 /** The lots with their hands-on and waiting time, and on which days they are in work. */
 @Component({
@@ -29,17 +29,17 @@ export class LotTable {
   private readonly formats = inject(Formats);
   private readonly isSmall = smallScreen();
 
-  readonly lots = input.required<readonly WorkedLot[]>();
+  readonly lots = input.required<readonly ShownLot[]>();
   readonly chosen = model<string>();
 
-  protected readonly idOf = ({ lotId }: WorkedLot): string => lotId;
-  protected readonly columns = computed<readonly FigureColumn<WorkedLot>[]>(() => {
-    const name: FigureColumn<WorkedLot> = {
+  protected readonly idOf = ({ lotId }: ShownLot): string => lotId;
+  protected readonly columns = computed<readonly FigureColumn<ShownLot>[]>(() => {
+    const name: FigureColumn<ShownLot> = {
       key: 'name',
       heading: $localize`Coated together`,
       kind: 'text',
       text: (lot) => lot.name,
-      minor: (lot) => (this.isSmall() ? this.small(lot) : ''),
+      minor: (lot) => [...(this.isSmall() ? [this.small(lot)] : []), lot.members].join('; '),
     };
     return [name, ...(this.isSmall() ? [] : this.times()), this.inWork()];
   });
@@ -48,7 +48,7 @@ export class LotTable {
     return { name: $localize`Together`, handsOn: this.hours(minutes) };
   });
 
-  private times(): FigureColumn<WorkedLot>[] {
+  private times(): FigureColumn<ShownLot>[] {
     return [
       {
         key: 'handsOn',
@@ -65,25 +65,27 @@ export class LotTable {
     ];
   }
 
-  private inWork(): FigureColumn<WorkedLot> {
+  private inWork(): FigureColumn<ShownLot> {
     return { key: 'days', heading: $localize`In work`, kind: 'text', text: (lot) => this.days(lot) };
   }
 
   /** What the columns of a phone leave out. */
-  private small({ handsOn_minutes, waiting_minutes }: WorkedLot): string {
+  private small({ handsOn_minutes, waiting_minutes }: ShownLot): string {
     const [handsOn, waiting] = [this.hours(handsOn_minutes), this.waiting(waiting_minutes)];
     return $localize`${handsOn}:hours: hands on, ${waiting}:time: waiting`;
   }
 
   private waiting(minutes: number): string {
-    return this.formats.figure('minutes', minutes);
+    // Of a wait of days nobody asks the minutes.
+    const whole = minutes < dayLength_minutes ? minutes : Math.round(minutes / 60) * 60;
+    return this.formats.figure('minutes', whole);
   }
 
   private hours(minutes: number): string {
     return $localize`${this.formats.number(minutes / 60, 1, 1)}:hours: h`;
   }
 
-  private days({ start_minutes, end_minutes }: WorkedLot): string {
+  private days({ start_minutes, end_minutes }: ShownLot): string {
     const [first, last] = [start_minutes, Math.max(start_minutes, end_minutes - 1)].map((at_minutes) =>
       this.formats.number(dayOf(at_minutes) + 1, 0),
     );

@@ -3,10 +3,12 @@ import { minorOf } from '#shared/money/minor-of';
 import { Formats } from '../../core/formats/formats';
 import { laidAs, type LeafOfProduct, LeafTotals } from '../../leaf';
 import { EmptyState } from '../../ui/page/empty-state';
+import { smallScreen } from '../../ui/screen/small-screen';
 import type { FigureColumn } from '../../ui/table/figure-column';
 import { FigureTable } from '../../ui/table/figure-table';
 import { EstimateStore } from '../estimate-store';
 import { MemberSelection } from '../members/member-selection';
+import { RestorationForm } from './restoration-form';
 
 /** One zone of any member. */
 interface ZoneOfJob {
@@ -19,18 +21,28 @@ interface ZoneOfJob {
   readonly area: string;
   readonly leaves: string;
   readonly hours: string;
+  readonly recutting: string;
 }
+
+const figureColumns: readonly FigureColumn<ZoneOfJob>[] = [
+  { key: 'buildUp', heading: $localize`Build-up`, kind: 'text', text: ({ buildUp }) => buildUp },
+  { key: 'area', heading: $localize`True surface`, kind: 'figure', text: ({ area }) => area },
+  { key: 'leaves', heading: $localize`Leaves`, kind: 'figure', text: ({ leaves }) => leaves },
+  { key: 'hours', heading: $localize`Hands-on h`, kind: 'figure', text: ({ hours }) => hours },
+  { key: 'recutting', heading: $localize`Recut h`, kind: 'figure', text: ({ recutting }) => recutting },
+];
 
 /** The gilding of the whole job: leaf by product, and every zone. */
 @Component({
   selector: 'app-whole-gilding',
-  imports: [EmptyState, FigureTable, LeafTotals],
+  imports: [EmptyState, FigureTable, LeafTotals, RestorationForm],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @if (rows().length > 0) {
       <header>
         <h2 i18n>Gilding of the whole job</h2>
       </header>
+      <app-restoration-form />
       @if (products().length > 0) {
         <h3 i18n>Leaf</h3>
         <app-leaf-totals [products]="products()" />
@@ -40,9 +52,10 @@ interface ZoneOfJob {
         i18n-caption
         caption="Every zone"
         selectable
-        [columns]="columns"
+        [columns]="columns()"
         [rows]="rows()"
         [rowId]="idOf"
+        [totals]="totals()"
         (chosenChange)="open($event)"
       />
     } @else {
@@ -61,6 +74,7 @@ export class WholeGilding {
   private readonly formats = inject(Formats);
   private readonly store = inject(EstimateStore);
   private readonly selection = inject(MemberSelection);
+  private readonly isSmall = smallScreen();
 
   protected readonly products = computed<readonly LeafOfProduct[]>(() => {
     const purchases = this.store.costed()?.cost.purchases ?? [];
@@ -83,28 +97,43 @@ export class WholeGilding {
             area: this.formats.area(worked.true_mm2),
             leaves: worked.leaf ? this.formats.number(worked.leaf.grossLeaves.likely, 1, 1) : '',
             hours: this.formats.number(worked.hours.likely, 1, 1),
+            recutting: worked.recutting ? this.formats.number(worked.recutting.hours.likely, 1, 1) : '',
           },
         ];
       }),
     );
   });
   protected readonly idOf = ({ zoneId }: ZoneOfJob): string => zoneId;
-  protected readonly columns: readonly FigureColumn<ZoneOfJob>[] = [
-    {
-      key: 'zone',
-      heading: $localize`Zone`,
-      kind: 'text',
-      text: ({ member, zone }) => `${member}, ${zone}`,
-      minor: ({ laid }) => laid,
-    },
-    { key: 'buildUp', heading: $localize`Build-up`, kind: 'text', text: ({ buildUp }) => buildUp },
-    { key: 'area', heading: $localize`True surface`, kind: 'figure', text: ({ area }) => area },
-    { key: 'leaves', heading: $localize`Leaves`, kind: 'figure', text: ({ leaves }) => leaves },
-    { key: 'hours', heading: $localize`Hands-on h`, kind: 'figure', text: ({ hours }) => hours },
-  ];
+  protected readonly totals = computed(() => {
+    const { tally, zones } = this.store.figures() ?? {};
+    const recut = zones?.reduce((sum, { recutting }) => sum + (recutting?.hours.likely ?? 0), 0) ?? 0;
+    return {
+      zone: $localize`Together`,
+      hours: this.formats.number(tally?.handsOn_hours.likely ?? 0, 1, 1),
+      recutting: recut > 0 ? this.formats.number(recut, 1, 1) : '',
+    };
+  });
+  protected readonly columns = computed<readonly FigureColumn<ZoneOfJob>[]>(() => {
+    const isRecut = this.rows().some(({ recutting }) => recutting !== '');
+    const [buildUp, area, leaves, hours, recutting] = figureColumns;
+    if (this.isSmall()) return [this.zone, leaves, hours];
+    return [this.zone, buildUp, area, leaves, hours, ...(isRecut ? [recutting] : [])];
+  });
+  private readonly zone: FigureColumn<ZoneOfJob> = {
+    key: 'zone',
+    heading: $localize`Zone`,
+    kind: 'text',
+    text: ({ member, zone }) => `${member}, ${zone}`,
+    minor: (row) => (this.isSmall() ? this.small(row) : row.laid),
+  };
 
   protected open(zoneId: string | undefined): void {
     const row = this.rows().find((one) => one.zoneId === zoneId);
     if (row) this.selection.select(row.memberId);
+  }
+  /** What the columns of a phone leave out. */
+  private small({ buildUp, laid, area, recutting }: ZoneOfJob): string {
+    const recut = recutting && $localize`${recutting}:hours: h of recutting`;
+    return [buildUp, laid, area, recut].filter(Boolean).join(', ');
   }
 }

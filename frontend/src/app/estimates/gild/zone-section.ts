@@ -19,6 +19,12 @@ import { Figure } from '../../ui/figure/figure';
         <dt i18n>Hands on</dt>
         <dd><app-figure [text]="hours().heading" [explained]="hours()" /></dd>
       </div>
+      @if (recutting(); as recut) {
+        <div>
+          <dt i18n>Recutting in gesso</dt>
+          <dd><app-figure [text]="recut.heading" [explained]="recut" /></dd>
+        </div>
+      }
       @if (zone().ground_mm > 0) {
         <div>
           <dt i18n>Ground</dt>
@@ -66,8 +72,16 @@ export class ZoneSection {
   );
   protected readonly ground = computed(() => this.formats.length(this.zone().ground_mm));
   protected readonly hours = computed<Explained>(() => {
-    const { zoneId, hours, steps } = this.zone();
+    const { zoneId, hours } = this.zone();
+    const steps = this.zone().steps.filter(({ kind }) => kind !== 'recut');
     const heading = this.formats.figure('hours', hours.likely);
     return { id: `hours ${zoneId}`, heading, reasons: steps.flatMap(({ reasons }) => reasons) };
+  });
+  /** Counted with the carving, and so not among the hands-on hours above. */
+  protected readonly recutting = computed<Explained | undefined>(() => {
+    const { zoneId, recutting } = this.zone();
+    if (!recutting) return undefined;
+    const heading = this.formats.figure('hours', recutting.hours.likely);
+    return { id: `recutting ${zoneId}`, heading, reasons: recutting.reasons };
   });
 }

@@ -19,6 +19,6 @@ export function shownZone({ id, steps }: BuildUp, surface: CoatSurface): ZoneFac
     recutting: isRecut ? (surface === 'recut' ? 'plain' : 'french') : null,
     ...{ recutting_hours: 0, laying: null, paintedOrnament_mm2: 0, protectedEdge_mm: 0, burnished_percent: null },
     chosenStepIds: steps.filter(({ optional }) => optional).map((step) => step.id),
-    ...{ needsSeal: true, isRestoration: false, isOutdoorsOrWet: false },
+    ...{ lot: '', needsSeal: true, isRestoration: false, isOutdoorsOrWet: false },
   };
 }
