@@ -12,6 +12,7 @@ import { leaf } from '#shared/words/en/leaf';
 import { measure } from '#shared/words/en/measure';
 import { money } from '#shared/words/en/money';
 import { problems } from '#shared/words/en/problems';
+import { programmeBoard } from '#shared/words/en/programme-board';
 import { rateCards } from '#shared/words/en/rate-cards';
 import { units } from '#shared/words/en/units';
 
@@ -34,6 +35,7 @@ export const en = {
   ...rateCards,
   ...jobs,
   ...estimates,
+  ...programmeBoard,
   ...documents,
   ...agreements,
 } as const;
