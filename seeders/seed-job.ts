@@ -15,7 +15,7 @@ async function openJob({ jobs, estimates }: App, actor: Actor, { client, job, ti
   const [clientId, jobId] = [newId(), newId()];
   await jobs.clients.keep(actor, { id: clientId, version: 0 }, client);
   await jobs.service.keep(actor, { id: jobId, version: 0 }, { ...job, clientId });
-  return estimates.drafts.begin(actor, { jobId, id: newId() }, title);
+  return estimates.drafts.begin(actor, { jobId, id: newId() }, { title, kind: 'estimate' });
 }
 
 /** Everything of a job as its estimator types it in. */

@@ -6,6 +6,7 @@ import { rateCards } from './0010-rate-cards';
 import { cardEffects } from './0011-card-effects';
 import { jobs } from './0020-jobs';
 import { estimates } from './0030-estimates';
+import { variations } from './0031-variations';
 import { agreements } from './0040-agreements';
 
 /** Every step of the schema, in the order in which they are taken. A step that was released is never changed. */
@@ -17,5 +18,6 @@ export const migrations: readonly Migration[] = [
   cardEffects,
   jobs,
   estimates,
+  variations,
   agreements,
 ];

@@ -5,9 +5,14 @@ import { memberContentSchema, pieceContentSchema } from '#shared/estimates/membe
 import { settingsSchema } from '#shared/estimates/settings-schema';
 import { identifier, instant, version } from '#shared/problems/entry-schema';
 
+/** The first of a job and its like, or a variation of what was agreed on the job. */
+export const estimateKinds = ['estimate', 'variation'] as const;
+export type EstimateKind = (typeof estimateKinds)[number];
+
 /** An estimate in a list: no figure that everybody may not see. */
 export const estimateSummarySchema = z.strictObject({
   id: identifier,
+  kind: z.enum(estimateKinds),
   number: z.string(),
   title: z.string(),
   /** The letter of its newest issue; null before the first. */

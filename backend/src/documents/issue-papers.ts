@@ -31,15 +31,21 @@ async function bytesOf(snapshot: Snapshot, logo: Buffer | null): Promise<Readonl
   };
 }
 
+function paperFile({ estimate }: Snapshot, paper: Paper, bytes: Buffer): PaperFile {
+  const [kind, ending] = paper.split('.');
+  const name = fileName([kind, estimate.number, estimate.letter], ending);
+  return { paper, name, media: media[paper], bytes };
+}
+
 /**
  * The papers of an issue, from nothing but the issue and the picture of the letterhead (PNG or JPEG): no clock, no chance, equal bytes for
  * equal content. The workbook and the leaf order show what things cost, and are not for clients.
  */
 export async function issuePapers(snapshot: Snapshot, logo: Buffer | null): Promise<PaperFile[]> {
   const bytes = await bytesOf(snapshot, logo);
-  const { number, letter } = snapshot.estimate;
-  return (Object.keys(media) as Paper[]).map((paper) => {
-    const [kind, ending] = paper.split('.');
-    return { paper, name: fileName([kind, number, letter], ending), media: media[paper], bytes: bytes[paper] };
-  });
+  return (Object.keys(media) as Paper[]).map((paper) => paperFile(snapshot, paper, bytes[paper]));
 }
+
+/** The paper of the client alone, as the issue's own would be: byte for byte, where nothing else is chosen. */
+export const clientPaper = async (snapshot: Snapshot, logo: Buffer | null): Promise<PaperFile> =>
+  paperFile(snapshot, 'estimate.pdf', await estimatePaper(snapshot, logo));

@@ -7,6 +7,7 @@ import { ThreadQueue } from '../platform/threads/thread-queue';
 /** What is asked of the thread that makes papers. */
 export type PaperQuestion =
   | { readonly kind: 'issue'; readonly snapshot: Snapshot; readonly logo: Uint8Array | null }
+  | { readonly kind: 'estimate'; readonly snapshot: Snapshot; readonly logo: Uint8Array | null }
   | { readonly kind: 'bench-sheet'; readonly request: BenchSheetRequest };
 
 /** Makes papers in a thread of its own, one order after the other: a paper takes longer than anybody else should wait. */
@@ -19,6 +20,11 @@ export class PaperMaking implements PaperMaker {
     const papers = (await this.thread.ask({ kind: 'issue', snapshot, logo })) as readonly PaperFile[];
     // What comes out of a thread is a plain array of bytes.
     return papers.map((paper) => ({ ...paper, bytes: Buffer.from(paper.bytes) }));
+  };
+
+  readonly estimatePaper = async (snapshot: Snapshot, logo: Buffer | null): Promise<PaperFile> => {
+    const paper = (await this.thread.ask({ kind: 'estimate', snapshot, logo })) as PaperFile;
+    return { ...paper, bytes: Buffer.from(paper.bytes) };
   };
 
   readonly benchSheet = async (request: BenchSheetRequest): Promise<Buffer> =>

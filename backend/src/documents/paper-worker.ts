@@ -1,11 +1,13 @@
 import { parentPort } from 'node:worker_threads';
 import { benchSheet } from './bench-sheet/bench-sheet';
-import { issuePapers } from './issue-papers';
+import { clientPaper, issuePapers } from './issue-papers';
 import type { PaperQuestion } from './paper-making';
 
 async function made(question: PaperQuestion) {
   if (question.kind === 'bench-sheet') return benchSheet(question.request);
-  return issuePapers(question.snapshot, question.logo && Buffer.from(question.logo));
+  const logo = question.logo && Buffer.from(question.logo);
+  if (question.kind === 'estimate') return clientPaper(question.snapshot, logo);
+  return issuePapers(question.snapshot, logo);
 }
 
 /** Sets papers and writes workbooks away from the thread that answers requests. */

@@ -1,3 +1,4 @@
+import type { EstimateKind } from '#shared/estimates/estimate-schema';
 import type { EstimateSettings } from '#shared/estimates/settings';
 import { column } from '../platform/database/columns';
 import type { Database } from '../platform/database/database';
@@ -5,6 +6,8 @@ import type { VersionedRow } from '../platform/database/workshop-rows';
 
 export interface EstimateRow extends VersionedRow {
   readonly jobId: string;
+  /** The job's own, or a variation of what was agreed on it. */
+  readonly kind: EstimateKind;
   readonly number: string;
   readonly rateCardId: string;
   readonly currency: string;
@@ -22,6 +25,7 @@ export const estimateTable = (database: Database) =>
     workshopId: column.workshopId,
     id: column.id,
     jobId: column.reference,
+    kind: column.word,
     number: column.word,
     version: column.whole,
     rateCardId: column.reference,

@@ -11,6 +11,7 @@ import type { WholeEstimate } from './worked-estimate';
 
 export const presentSummary = (row: EstimateRow): EstimateSummary => ({
   id: row.id,
+  kind: row.kind,
   number: row.number,
   title: row.settings.title,
   letter: row.letter,

@@ -19,7 +19,7 @@ export const estimateRoutes = (estimates: EstimateService, presences: PresenceSe
   }),
   mount(beginEstimate, async ({ actor, params, body }) => {
     const at = { jobId: params.jobId, id: params.estimateId };
-    return presentSummary(await estimates.begin(actor, at, body.title));
+    return presentSummary(await estimates.begin(actor, at, { title: body.title, kind: 'estimate' }));
   }),
   mount(readEstimate, ({ actor, params }) => estimates.read(actor, params.estimateId)),
   mount(

@@ -5,7 +5,7 @@ import { audienceOf } from '#shared/actor/role';
 import type { Change } from '#shared/estimates/change-schema';
 import type { Choice, Draft } from '#shared/estimates/draft';
 import { draftInOrder } from '#shared/estimates/draft-in-order';
-import type { AlternativeTotal, CostedEstimate, KeptChanges } from '#shared/estimates/estimate-schema';
+import type { AlternativeTotal, CostedEstimate, EstimateKind, KeptChanges } from '#shared/estimates/estimate-schema';
 import type { Figures } from '#shared/estimates/figures';
 import { startSettings } from '#shared/estimates/start-settings';
 import { Rejection } from '#shared/problems/rejection';
@@ -43,6 +43,12 @@ export interface EstimateParts {
   readonly clock: Clock;
 }
 
+/** What an estimate is begun as. */
+export interface Begun {
+  readonly title: string;
+  readonly kind: EstimateKind;
+}
+
 /** Drafts of estimates: beginning, reading and changing them, and the card they are worked on. */
 export class EstimateService {
   constructor(private readonly parts: EstimateParts) {}
@@ -53,13 +59,14 @@ export class EstimateService {
   }
 
   /** Begins an estimate on the card in force; the same id again finds what was begun. */
-  async begin(actor: Actor, at: { jobId: string; id: string }, title: string): Promise<EstimateRow> {
+  async begin(actor: Actor, at: { jobId: string; id: string }, begun: Begun): Promise<EstimateRow> {
+    const { title, kind } = begun;
     const { workshopId } = actor;
     // Touching the job holds its row, so that two estimates begun at once are numbered one after the other.
     const job = await this.parts.jobs.job(workshopId, at.jobId);
     await this.parts.jobs.touch(workshopId, at.jobId);
     const known = await this.parts.estimates.find(workshopId, at.id);
-    if (known) return this.sameJob(known, at.jobId);
+    if (known) return this.same(known, at.jobId, kind);
     const card = await this.parts.cards.inForce(workshopId);
     const { currency } = await this.parts.workshops.get(workshopId);
     const earlier = await this.parts.estimates.ofJob(workshopId, at.jobId);
@@ -68,6 +75,7 @@ export class EstimateService {
     const row = await this.parts.estimates.insert(workshopId, {
       id: at.id,
       jobId: at.jobId,
+      kind,
       number: `${jobNumber(job)}-${earlier.length + 1}`,
       version: 1,
       rateCardId: card.id,
@@ -82,7 +90,7 @@ export class EstimateService {
     await this.parts.audit.record(actor, {
       subject,
       jobId: row.jobId,
-      code: 'history-estimate-begun',
+      code: kind === 'variation' ? 'history-variation-begun' : 'history-estimate-begun',
       values: { number: row.number },
     });
     await this.refresh(workshopId, row.id);
@@ -207,8 +215,8 @@ export class EstimateService {
     return { whole, figures };
   }
 
-  private sameJob(row: EstimateRow, jobId: string): EstimateRow {
-    if (row.jobId !== jobId) throw new Rejection('not-found', 'problem-not-found');
+  private same(row: EstimateRow, jobId: string, kind: EstimateKind): EstimateRow {
+    if (row.jobId !== jobId || row.kind !== kind) throw new Rejection('not-found', 'problem-not-found');
     return row;
   }
 }

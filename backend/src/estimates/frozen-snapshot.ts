@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import { gunzipSync, gzipSync } from 'node:zlib';
 import { canonicalJson } from '#shared/estimates/canonical-json';
 import type { Snapshot } from '#shared/estimates/snapshot';
+import type { EstimateRow } from './estimate-model';
 import type { IssueRow } from './issue-model';
 import type { WholeEstimate } from './worked-estimate';
 
@@ -22,13 +23,13 @@ export function thawedSnapshot(row: Pick<IssueRow, 'snapshot' | 'sha256' | 'id'>
 /** A frozen estimate put as the tables would hold it, so that one presenter serves drafts and issues. */
 export function wholeOfSnapshot(
   { draft, estimate, workshop, issuedAt }: Snapshot,
-  row: IssueRow & { jobId: string; rateCardId: string },
+  row: IssueRow & Pick<EstimateRow, 'jobId' | 'kind' | 'rateCardId'>,
 ): WholeEstimate {
-  const { workshopId, jobId, rateCardId } = row;
+  const { workshopId, jobId, kind, rateCardId } = row;
   const common = { workshopId, estimateId: estimate.id, version: 1 };
   return {
     estimate: {
-      ...{ workshopId, id: estimate.id, jobId, number: estimate.number, version: 1, rateCardId },
+      ...{ workshopId, id: estimate.id, jobId, kind, number: estimate.number, version: 1, rateCardId },
       currency: workshop.currency,
       settings: draft.settings,
       settingsVersion: 1,

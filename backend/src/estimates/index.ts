@@ -10,6 +10,7 @@ import { memberRepository, pieceRepository } from './content-repository';
 import { EstimateRepository } from './estimate-repository';
 import { estimateRoutes } from './estimate-routes';
 import { EstimateService } from './estimate-service';
+import { FrozenIssueService } from './frozen-issue-service';
 import type { PaperMaker } from './paper-maker';
 import { IssueRepository } from './issue-repository';
 import { issueRoutes } from './issue-routes';
@@ -22,11 +23,15 @@ import { RiskDrawing } from './risk-drawing';
 
 export type { BenchSheetRequest, PaperFile, PaperMaker } from './paper-maker';
 export type { EstimateService } from './estimate-service';
+export type { FrozenIssue, FrozenIssueService, IssuedPaper, IssueOfEstimate } from './frozen-issue-service';
+export { presentSummary } from './estimate-presenter';
 export type { IssueService } from './issue-service';
 
 export interface Estimates {
   readonly drafts: EstimateService;
   readonly issues: IssueService;
+  /** Issues as they were frozen, for whoever reads or accepts them. */
+  readonly frozen: FrozenIssueService;
   /** What another rate card does to every open estimate. */
   readonly cardEffects: CardEffects;
   readonly routes: readonly Route[];
@@ -57,15 +62,10 @@ export function openEstimates({ database, clock, files }: Platform, needs: Estim
   const readings = new ReadingService(new ReadingRepository(database));
   const presences = new PresenceRepository(database);
   const drafts = new EstimateService({ ...parts, presences, readings, changes: new ChangeService(parts) });
-  const issues = new IssueService({
-    ...parts,
-    drafts,
-    issues: new IssueRepository(database),
-    files,
-    papers: needs.papers,
-  });
+  const kept = { ...parts, drafts, issues: new IssueRepository(database), files, papers: needs.papers };
+  const issues = new IssueService(kept);
   const presence = new PresenceService({ ...parts, presences });
   const effects = cardEffects({ drafts, jobs: needs.jobs, cards: needs.rateCards.service, risks: parts.risks });
   const routes = [...estimateRoutes(drafts, presence), ...issueRoutes(issues)];
-  return { drafts, issues, cardEffects: effects, routes };
+  return { drafts, issues, frozen: new FrozenIssueService(kept), cardEffects: effects, routes };
 }

@@ -53,6 +53,12 @@ export class IssueRepository {
     await this.papers.insert(workshopId, paper);
   }
 
+  /** Of several estimates, the newest first. */
+  ofEstimates(workshopId: string, estimateIds: readonly string[]): Promise<IssueRow[]> {
+    const where = { estimateId: { [Op.in]: [...estimateIds] } };
+    return this.issues.list(workshopId, { where, order: [['id', 'DESC']] });
+  }
+
   async paperFile(workshopId: string, issueId: string, paper: Paper): Promise<string | undefined> {
     const [row] = await this.papers.list(workshopId, { where: { issueId, paper }, limit: 1 });
     return row?.fileId;

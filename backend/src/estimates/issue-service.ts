@@ -8,6 +8,7 @@ import type { Paper } from '#shared/estimates/issue-schema';
 import { lineDifferences, type LineDifference, type NamedLines } from '#shared/estimates/line-differences';
 import type { Snapshot } from '#shared/estimates/snapshot';
 import { Rejection } from '#shared/problems/rejection';
+import type { Doer } from '../audit';
 import { jobNumber, type NamedJobRow } from '../jobs';
 import type { FileStore } from '../platform/files/file-store';
 import { dayOfInstant } from '#shared/calendar/day-of-instant';
@@ -88,26 +89,27 @@ export class IssueService {
     return row;
   }
 
-  /** Marks an issue sent, accepted or declined; the job's state follows. */
+  /** Marks an issue sent, accepted or declined; the job's state follows, but for a variation, which leaves it where it is. */
   async mark(
-    actor: Actor,
+    by: Doer,
     id: string,
     mark: { state: 'sent' | 'accepted' | 'declined'; day: string; note: string },
   ): Promise<IssueRow> {
-    const { workshopId } = actor;
+    const { workshopId } = by;
     const issue = await this.parts.issues.lock(workshopId, id);
     const { timeZone } = await this.parts.workshops.get(workshopId);
     const issued = dayOfInstant(issue.issuedAt.getTime(), timeZone);
     mayBeMarked(issue, mark, { issued, today: await this.parts.cards.today(workshopId) });
+    if (mark.state === 'accepted') await this.refuseSecond(issue);
     const row = await this.parts.issues.mark(workshopId, id, {
       state: mark.state,
       markedOn: mark.day,
       markNote: mark.note,
     });
     const estimate = await this.parts.estimates.get(workshopId, issue.estimateId);
-    await this.parts.jobs.markState(actor, estimate.jobId, mark.state);
+    if (estimate.kind === 'estimate') await this.parts.jobs.markState(by, estimate.jobId, mark.state);
     const values = { letter: issue.letter, number: estimate.number };
-    await this.parts.audit.record(actor, {
+    await this.parts.audit.record(by, {
       subject: { kind: 'issue', id },
       jobId: estimate.jobId,
       code: auditCodes[mark.state],
@@ -120,9 +122,10 @@ export class IssueService {
     const { workshopId } = actor;
     const row = await this.parts.issues.get(workshopId, id);
     const estimate = await this.parts.estimates.get(workshopId, row.estimateId);
+    const { jobId, kind, rateCardId } = estimate;
     const snapshot = thawedSnapshot(row);
     const before = await this.parts.issues.newest(workshopId, row.estimateId, row.sequence);
-    const whole = wholeOfSnapshot(snapshot, { ...row, jobId: estimate.jobId, rateCardId: estimate.rateCardId });
+    const whole = wholeOfSnapshot(snapshot, { ...row, jobId, kind, rateCardId });
     return {
       summary: presentIssue(row),
       differences: before ? lineDifferences(namedLines(thawedSnapshot(before)), namedLines(snapshot)) : [],
@@ -168,6 +171,12 @@ export class IssueService {
     const draft = this.parts.drafts.draft(whole);
     const bytes = await this.parts.papers.benchSheet({ workshop, job, pieceId, draft, figures, ...made });
     return new FileAnswer(bytes, { name: `${job.number} ${piece.content.name}.pdf`, media: 'application/pdf' });
+  }
+
+  /** Of one estimate one issue is agreed on: what changes afterwards is a variation. */
+  private async refuseSecond({ workshopId, estimateId }: IssueRow): Promise<void> {
+    const others = await this.parts.issues.ofEstimate(workshopId, estimateId);
+    if (others.some(({ state }) => state === 'accepted')) throw new Rejection('conflict', 'decision-another-accepted');
   }
 
   private async job(workshopId: string, jobId: string): Promise<NamedJobRow & { number: string }> {

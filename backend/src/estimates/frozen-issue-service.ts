@@ -1,0 +1,97 @@
+import { calculatorVersion } from '#shared/estimates/calculator-version';
+import type { Choice } from '#shared/estimates/draft';
+import type { Snapshot } from '#shared/estimates/snapshot';
+import { Rejection } from '#shared/problems/rejection';
+import type { WorkshopService } from '../accounts';
+import type { FileStore } from '../platform/files/file-store';
+import type { EstimateRow } from './estimate-model';
+import type { EstimateRepository } from './estimate-repository';
+import { thawedSnapshot } from './frozen-snapshot';
+import type { IssueRow } from './issue-model';
+import type { IssueRepository } from './issue-repository';
+import type { PaperMaker } from './paper-maker';
+import type { RiskDrawing } from './risk-drawing';
+
+interface Parts {
+  readonly estimates: EstimateRepository;
+  readonly issues: IssueRepository;
+  readonly risks: RiskDrawing;
+  readonly workshops: WorkshopService;
+  readonly files: FileStore;
+  readonly papers: PaperMaker;
+}
+
+/** An issue beside the estimate it was made of. */
+export interface IssueOfEstimate {
+  readonly row: IssueRow;
+  readonly estimate: EstimateRow;
+}
+
+/** An issue with all that it froze. */
+export interface FrozenIssue extends IssueOfEstimate {
+  readonly snapshot: Snapshot;
+}
+
+/** A paper to be sent or kept. */
+export interface IssuedPaper {
+  readonly name: string;
+  readonly media: string;
+  readonly bytes: Buffer;
+}
+
+/** Issues as they were frozen: read, priced with a choice of alternatives, and set on paper with it. */
+export class FrozenIssueService {
+  constructor(private readonly parts: Parts) {}
+
+  /** All issues of a job, the newest first. */
+  async ofJob(workshopId: string, jobId: string): Promise<IssueOfEstimate[]> {
+    const estimates = await this.parts.estimates.ofJob(workshopId, jobId);
+    const byId = new Map(estimates.map((estimate) => [estimate.id, estimate]));
+    const rows = await this.parts.issues.ofEstimates(workshopId, [...byId.keys()]);
+    return rows.flatMap((row) => {
+      const estimate = byId.get(row.estimateId);
+      return estimate ? [{ row, estimate }] : [];
+    });
+  }
+
+  async read(workshopId: string, issueId: string): Promise<FrozenIssue> {
+    return this.whole(await this.parts.issues.get(workshopId, issueId));
+  }
+
+  /** The same, held until the transaction ends: of many who decide at once one is first. */
+  async hold(workshopId: string, issueId: string): Promise<FrozenIssue> {
+    return this.whole(await this.parts.issues.lock(workshopId, issueId));
+  }
+
+  /** The snapshot with these alternatives taken, worked from nothing but what was frozen. The base is what was issued, to the letter. */
+  async chosen({ snapshot }: Pick<FrozenIssue, 'snapshot'>, choice: Choice): Promise<Snapshot> {
+    if (choice.length === 0) return snapshot;
+    if (snapshot.calculatorVersion !== calculatorVersion) throw new Rejection('conflict', 'choice-fixed');
+    const { draft, card, workshop } = snapshot;
+    const figures = await this.parts.risks.priced({ draft, card, choice, currency: workshop.currency });
+    const all = [...figures.findings, ...figures.cost.findings];
+    if (all.some(({ kind }) => kind === 'refuse' || kind === 'missing'))
+      throw new Rejection('conflict', 'choice-not-possible');
+    return { ...snapshot, choice, figures };
+  }
+
+  /** The client's paper: of the base the very one that was issued, of a choice one set from what was frozen. Equal choice, equal bytes. */
+  async paper({ row, snapshot }: FrozenIssue, choice: Choice): Promise<IssuedPaper> {
+    const { workshopId, id } = row;
+    if (choice.length > 0)
+      return this.parts.papers.estimatePaper(await this.chosen({ snapshot }, choice), await this.logo(workshopId));
+    const fileId = await this.parts.issues.paperFile(workshopId, id, 'estimate.pdf');
+    if (!fileId) throw new Rejection('not-found', 'problem-not-found');
+    return this.parts.files.read(workshopId, fileId);
+  }
+
+  private async logo(workshopId: string): Promise<Buffer | null> {
+    const { logoFileId } = await this.parts.workshops.get(workshopId);
+    return logoFileId ? (await this.parts.files.read(workshopId, logoFileId)).bytes : null;
+  }
+
+  private async whole(row: IssueRow): Promise<FrozenIssue> {
+    const estimate = await this.parts.estimates.get(row.workshopId, row.estimateId);
+    return { row, estimate, snapshot: thawedSnapshot(row) };
+  }
+}
