@@ -1,47 +1,48 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, output, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
-import { cardDifferences } from '#shared/rate-cards/card-differences';
+import type { CardSide } from '#shared/rate-cards/merged-values';
 import type { WholeRateCard } from '#shared/rate-cards/rate-cards-endpoints';
 import { CardStore } from './card-store';
-import { DifferenceList } from '../changes/difference-list';
+import { OverlapWriting } from './overlap-writing';
 
-/** Somebody else kept this draft meanwhile: what differs, and which side is to stand. */
+/** Somebody else kept the same lines of this draft meanwhile: both sides of each, and whose is to stand. */
 @Component({
   selector: 'app-card-conflict',
-  imports: [DifferenceList, MatButton],
+  imports: [MatButton],
   changeDetection: ChangeDetectionStrategy.OnPush,
   host: { role: 'alert' },
-  template: `
-    <h2 i18n>Somebody else changed this draft meanwhile</h2>
-    <p i18n>Before each arrow stands what is kept now, after it what was entered here.</p>
-    @if (content(); as mine) {
-      <app-difference-list [differences]="differences()" [before]="theirs().content" [after]="mine" />
-    }
-    <div class="actions">
-      <button matButton="outlined" type="button" (click)="mine.emit()" i18n>Keep mine</button>
-      <button matButton type="button" (click)="taken.emit()" i18n>Take what is kept now</button>
-    </div>
-  `,
-  styles: `
-    :host {
-      display: grid;
-      gap: 12px;
-      padding: 16px;
-      border-left: 3px solid var(--warn);
-      background: var(--tint);
-    }
-  `,
+  templateUrl: './card-conflict.html',
+  styleUrl: './card-conflict.scss',
 })
 export class CardConflict {
   private readonly store = inject(CardStore);
+  private readonly writing = inject(OverlapWriting);
 
   readonly theirs = input.required<WholeRateCard>();
-  readonly mine = output();
-  readonly taken = output();
+  readonly settled = output<(key: string) => CardSide>();
 
-  protected readonly content = this.store.content;
-  protected readonly differences = computed(() => {
-    const mine = this.content();
-    return mine ? cardDifferences(this.theirs().content, mine) : [];
+  protected readonly chosen = signal<ReadonlyMap<string, CardSide>>(new Map());
+  protected readonly lines = computed(() => {
+    const theirs = this.theirs();
+    const merged = (sideOf: (key: string) => CardSide) => this.store.mergedWith(theirs, sideOf);
+    const mine = merged(() => 'mine');
+    return (mine?.overlaps ?? []).map((key) => {
+      const other = merged((one) => (one === key ? 'theirs' : 'mine'));
+      return this.writing.line(key, { mine: mine!.entries, theirs: other!.entries });
+    });
   });
+  protected readonly isWhole = computed(() => this.lines().every(({ key }) => this.chosen().has(key)));
+
+  protected choose(key: string, side: CardSide): void {
+    this.chosen.update((chosen) => new Map(chosen).set(key, side));
+  }
+
+  protected all(side: CardSide): void {
+    this.chosen.set(new Map(this.lines().map(({ key }) => [key, side])));
+  }
+
+  protected settle(): void {
+    const chosen = this.chosen();
+    this.settled.emit((key) => chosen.get(key) ?? 'mine');
+  }
 }

@@ -14,6 +14,7 @@ import { CardStore } from './card-store';
 
 const id = '018f0000-0000-7000-8000-000000000031';
 const gilder = ['money', 'grades', 2, 'costPerHour'];
+const carver = ['money', 'grades', 1, 'costPerHour'];
 
 const refusal = (status: number, more: object = {}) =>
   new ProblemError(
@@ -55,6 +56,7 @@ describe('A draft of a rate card', () => {
   const settle = (wait_ms = 0) => new Promise((resolve) => setTimeout(resolve, wait_ms));
   const saving = () => TestBed.inject(Saving);
   const gilderOf = ({ money }: RateCard) => money.grades[2]?.costPerHour;
+  const carverOf = ({ money }: RateCard) => money.grades[1]?.costPerHour;
 
   beforeEach(async () => {
     server = new CardServer();
@@ -108,23 +110,47 @@ describe('A draft of a rate card', () => {
     expect(store.canRedo()).toBe(false);
   });
 
-  it('shows both sides when somebody was faster, and keeps mine over theirs when told', async () => {
-    const theirs = withValueAt<RateCard>(startCard, gilder, '40.00');
-    server.change({ name: 'Spring', content: theirs });
+  it('lays together what two changed in different lines, by itself', async () => {
+    server.change({ name: 'Summer', content: withValueAt<RateCard>(startCard, carver, '32.00') });
     store.enterCell(gilder, '34.00');
-    expect(await cardSaving.flush()).toBe(false);
-    expect(gilderOf(cardSaving.theirs()!.content)).toBe('40.00');
-    expect(gilderOf(store.content()!)).toBe('34.00');
-    expect(await cardSaving.keepMine()).toBe(true);
-    expect([gilderOf(server.card.content), server.card.version, cardSaving.theirs()]).toEqual(['34.00', 3, undefined]);
+    expect(await cardSaving.flush()).toBe(true);
+    expect([gilderOf(server.card.content), carverOf(server.card.content), server.card.name]).toEqual([
+      '34.00',
+      '32.00',
+      'Summer',
+    ]);
+    expect([cardSaving.theirs(), saving().state()]).toEqual([undefined, 'kept']);
   });
 
-  it('takes theirs when told', async () => {
-    server.change({ name: 'Summer', content: startCard });
+  it('undoes what was entered here alone after that', async () => {
+    server.change({ name: 'Spring', content: withValueAt<RateCard>(startCard, carver, '32.00') });
     store.enterCell(gilder, '34.00');
     await cardSaving.flush();
-    cardSaving.takeTheirs();
-    expect([store.entered()?.name, gilderOf(store.content()!), store.isDirty()]).toEqual(['Summer', '33.00', false]);
+    store.undo();
+    expect([gilderOf(store.content()!), carverOf(store.content()!)]).toEqual(['33.00', '32.00']);
+    store.redo();
+    expect([gilderOf(store.content()!), carverOf(store.content()!)]).toEqual(['34.00', '32.00']);
+  });
+
+  it('asks about a line both changed, and keeps it as chosen with the other lines of both', async () => {
+    const both = withValueAt<RateCard>(startCard, carver, '32.00');
+    server.change({ name: 'Spring', content: withValueAt<RateCard>(both, gilder, '40.00') });
+    store.enterCell(gilder, '34.00');
+    expect(await cardSaving.flush()).toBe(false);
+    const theirs = cardSaving.theirs()!;
+    expect([gilderOf(theirs.content), gilderOf(store.content()!)]).toEqual(['40.00', '34.00']);
+    expect(store.mergedWith(theirs)?.overlaps).toEqual(['content/money/grades/gilder/costPerHour']);
+    expect(await cardSaving.settle(() => 'mine')).toBe(true);
+    expect([gilderOf(server.card.content), carverOf(server.card.content)]).toEqual(['34.00', '32.00']);
+    expect([server.card.version, cardSaving.theirs()]).toEqual([3, undefined]);
+  });
+
+  it('sends nothing where theirs was chosen and nothing else differs', async () => {
+    server.change({ name: 'Spring', content: withValueAt<RateCard>(startCard, gilder, '40.00') });
+    store.enterCell(gilder, '34.00');
+    await cardSaving.flush();
+    expect(await cardSaving.settle(() => 'theirs')).toBe(true);
+    expect([gilderOf(store.content()!), store.isDirty(), server.card.version]).toEqual(['40.00', false, 2]);
   });
 
   it('waits for a server that is away, and sends again', async () => {

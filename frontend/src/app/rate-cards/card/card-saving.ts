@@ -2,11 +2,12 @@ import { DOCUMENT, ErrorHandler, Injectable, effect, inject, signal } from '@ang
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { type Observable, Subject, catchError, concatMap, debounceTime, defer, EMPTY, filter, finalize } from 'rxjs';
 import { fromEvent, map, merge, race, retry, throwError, timer } from 'rxjs';
+import type { CardSide } from '#shared/rate-cards/merged-values';
 import { wholeRateCardSchema, type WholeRateCard } from '#shared/rate-cards/rate-cards-endpoints';
 import { Notices } from '../../core/problems/notices';
 import { ProblemError } from '../../core/problems/problem-error';
 import { Saving } from '../../core/saving/saving';
-import { RateCardCalls, type CardEntries } from '../rate-card-calls';
+import { RateCardCalls } from '../rate-card-calls';
 import { CardStore } from './card-store';
 
 const afterTheLastKey_ms = 600;
@@ -24,7 +25,7 @@ export class CardSaving {
   private readonly asks = new Subject<() => void>();
   private readonly current = signal<WholeRateCard | undefined>(undefined);
 
-  /** What somebody else kept meanwhile, until one of the two sides is chosen. */
+  /** What somebody else kept meanwhile, until it is chosen whose lines stand. */
   readonly theirs = this.current.asReadonly();
 
   constructor() {
@@ -49,22 +50,13 @@ export class CardSaving {
     return !this.store.isDirty();
   }
 
-  /** Mine is to stand, over what somebody else kept. */
-  keepMine(): Promise<boolean> {
+  /** The lines both changed stand as chosen, everything else of both sides stands too. */
+  settle(sideOf: (key: string) => CardSide): Promise<boolean> {
     const theirs = this.current();
     this.current.set(undefined);
-    if (theirs) {
-      const { content, ...summary } = theirs;
-      this.store.tell(summary, { name: theirs.name, content });
-    }
-    return this.flush();
-  }
-
-  takeTheirs(): void {
-    const theirs = this.current();
-    this.current.set(undefined);
-    if (theirs) this.store.put(theirs);
+    if (theirs) this.store.rebase(theirs, sideOf);
     this.saving.reset();
+    return this.flush();
   }
 
   private sent(): Observable<unknown> {
@@ -87,24 +79,30 @@ export class CardSaving {
       this.store.tell(await this.calls.keep(summary, entered), entered);
       this.saving.kept();
     } catch (error) {
-      this.dealWith(error, entered);
+      await this.dealWith(error);
     }
   }
 
-  private dealWith(error: unknown, entered: CardEntries): void {
+  private async dealWith(error: unknown): Promise<void> {
     if (!(error instanceof ProblemError) || error.isPassing) throw error;
-    if (error.isStale) this.ask(error, entered);
+    if (error.isStale) await this.join(error);
     else if (error.status === 400) this.refuse(error);
     else throw error;
   }
 
-  /** Somebody was faster: both sides are shown. */
-  private ask({ problem }: ProblemError, entered: CardEntries): void {
+  /** Somebody was faster: what they changed is laid under what was entered here; a line both changed is asked about. */
+  private async join({ problem }: ProblemError): Promise<void> {
     const theirs = wholeRateCardSchema.parse(problem.current);
-    this.saving.fail();
-    if (JSON.stringify([theirs.name, theirs.content]) === JSON.stringify([entered.name, entered.content]))
-      this.store.put(theirs);
-    else this.current.set(theirs);
+    const overlaps = this.store.mergedWith(theirs)?.overlaps ?? [];
+    if (overlaps.length > 0) {
+      this.saving.fail();
+      this.current.set(theirs);
+      return;
+    }
+    this.store.rebase(theirs);
+    this.notices.say($localize`Somebody else changed other lines of this draft; theirs and yours both stand.`);
+    if (this.store.isDirty()) await this.send();
+    else this.saving.kept();
   }
 
   private refuse({ problem }: ProblemError): void {

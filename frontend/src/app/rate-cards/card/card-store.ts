@@ -5,12 +5,15 @@ import type { RateCard } from '#shared/rate-cards/rate-card';
 import { rateCardSchema } from '#shared/rate-cards/rate-card-schema';
 import { rateCardName, type RateCardSummary } from '#shared/rate-cards/rate-card-summary-schema';
 import type { WholeRateCard } from '#shared/rate-cards/rate-cards-endpoints';
+import { cardDifferences } from '#shared/rate-cards/card-differences';
+import type { CardSide } from '#shared/rate-cards/merged-values';
 import type { CellPath } from '#shared/rate-cards/tables/cell-path';
 import { Words } from '../../core/formats/words';
 import { NOW } from '../../core/now';
 import { Session } from '../../core/session/session';
 import { withCell } from '../cells/with-cell';
 import { RateCardCalls, type CardEntries } from '../rate-card-calls';
+import { mergedEntries, type MergedEntries } from './merged-entries';
 import { Remarks, pathKey, type Remark, type Unread } from './remarks';
 import { UndoSteps } from './undo-steps';
 
@@ -88,6 +91,24 @@ export class CardStore {
     this.unread.set(nothingUnread);
     this.refused.set([]);
     this.steps.forget();
+  }
+
+  /** What both sides make of the draft since it was last kept here, and the lines that are to be chosen. */
+  mergedWith(theirs: CardEntries, sideOf: (key: string) => CardSide = () => 'mine'): MergedEntries | undefined {
+    const card = this.card();
+    return card && mergedEntries({ base: card.kept, mine: card.entered, theirs }, sideOf);
+  }
+
+  /** What somebody else kept meanwhile is under what is entered here from now on, and under every step that can be undone. */
+  rebase({ content, ...summary }: WholeRateCard, sideOf?: (key: string) => CardSide): void {
+    const card = this.card();
+    const theirs = { name: summary.name, content };
+    const merged = this.mergedWith(theirs, sideOf);
+    if (!card || !merged) return;
+    this.steps.rebase((mine) => mergedEntries({ base: card.kept, mine, theirs }, () => 'mine').entries);
+    const differences = cardDifferences(content, merged.entries.content);
+    const isTheirs = differences.length === 0 && merged.entries.name === theirs.name;
+    this.card.set({ summary, kept: theirs, entered: isTheirs ? theirs : merged.entries });
   }
 
   /** The card stands otherwise than before: kept, dated, taken back. */

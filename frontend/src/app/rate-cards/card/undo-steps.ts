@@ -45,6 +45,14 @@ export class UndoSteps<T> {
     return step.after;
   }
 
+  /** Every step as if what changed meanwhile had been there from the start. */
+  rebase(onto: (entries: T) => T): void {
+    const moved = (steps: readonly Step<T>[]) =>
+      steps.map((step) => ({ ...step, before: onto(step.before), after: onto(step.after) }));
+    this.past.update(moved);
+    this.future.update(moved);
+  }
+
   forget(): void {
     this.past.set([]);
     this.future.set([]);
