@@ -7,7 +7,7 @@ import { Api } from '../core/api/api';
 import { schemaForm } from '../core/forms/schema-form';
 import { FormComplaint } from '../ui/field/form-complaint';
 import { AccountsSession } from './accounts-session';
-import { fragmentToken } from './fragment-token';
+import { fragmentToken } from '../core/routing/fragment-token';
 import { PasswordField } from './password-field';
 import { StrangerFrame } from './stranger-frame';
 

@@ -10,7 +10,7 @@ import { Field } from '../ui/field/field';
 import { FormComplaint } from '../ui/field/form-complaint';
 import { Skeleton } from '../ui/page/skeleton';
 import { AccountsSession } from './accounts-session';
-import { fragmentToken } from './fragment-token';
+import { fragmentToken } from '../core/routing/fragment-token';
 import { PasswordField } from './password-field';
 import { StrangerFrame } from './stranger-frame';
 

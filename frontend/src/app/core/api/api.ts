@@ -55,7 +55,7 @@ export class Api {
   private async isAdmittedAgain(endpoint: Endpoint, error: unknown): Promise<boolean> {
     if (!(error instanceof ProblemError) || !error.isOfSession) return false;
     const port = this.injector.get(SESSION_PORT);
-    if (endpoint.callers === 'anyone' || !this.session.isSignedIn()) {
+    if (endpoint.callers === 'anyone' || endpoint.callers === 'client' || !this.session.isSignedIn()) {
       if (error.status === 401) return false;
       await port.read();
       return true;

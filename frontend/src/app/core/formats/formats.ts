@@ -15,7 +15,7 @@ import { strangerSettings } from './stranger-settings';
 export class Formats {
   private readonly session = inject(Session);
   private readonly catalogue = inject(CATALOGUE);
-  private readonly reader = computed(() => this.session.workshop() ?? strangerSettings());
+  private readonly reader = computed(() => this.session.reader() ?? strangerSettings());
 
   readonly locale = computed(() => this.reader().locale);
   readonly currency = computed(() => this.reader().currency);

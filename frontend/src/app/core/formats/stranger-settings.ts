@@ -1,9 +1,7 @@
-import type { WorkshopFacts } from '../session/session-facts';
-
-type Reader = Pick<WorkshopFacts, 'locale' | 'currency' | 'lengthUnit' | 'timeZone'>;
+import type { ReaderFacts } from '../session/session-facts';
 
 /** How a stranger's figures are written until a workshop says otherwise: as their browser has it. */
-export const strangerSettings = (): Reader => ({
+export const strangerSettings = (): ReaderFacts => ({
   locale: globalThis.navigator?.language || 'en-GB',
   currency: 'EUR',
   lengthUnit: 'mm',

@@ -10,6 +10,9 @@ export interface WorkshopFacts {
   readonly timeZone: string;
 }
 
+/** How figures are written for whoever reads. */
+export type ReaderFacts = Pick<WorkshopFacts, 'locale' | 'currency' | 'lengthUnit' | 'timeZone'>;
+
 /** A workshop one belongs to, and what one does there. */
 export interface MembershipFacts {
   readonly id: string;
