@@ -7,6 +7,7 @@ import { carving } from '#shared/words/en/carving';
 import { documents } from '#shared/words/en/documents';
 import { drying } from '#shared/words/en/drying';
 import { estimates } from '#shared/words/en/estimates';
+import { invoices } from '#shared/words/en/invoices';
 import { jobs } from '#shared/words/en/jobs';
 import { leaf } from '#shared/words/en/leaf';
 import { measure } from '#shared/words/en/measure';
@@ -38,4 +39,5 @@ export const en = {
   ...programmeBoard,
   ...documents,
   ...agreements,
+  ...invoices,
 } as const;
