@@ -2,6 +2,16 @@ import * as z from 'zod';
 import { pageOf, pageQuery } from '#shared/actor/page-schema';
 import { identifier, instant } from '#shared/problems/entry-schema';
 
+const fieldValue = z.union([z.string(), z.number(), z.boolean()]).nullable();
+
+/** A field that differs, as `FieldChange` has it. */
+const fieldChangeSchema = z.strictObject({
+  path: z.array(z.string()),
+  what: z.enum(['changed', 'added', 'removed', 'moved']),
+  before: fieldValue,
+  after: fieldValue,
+});
+
 /** One entry of the history: who did what to which thing, and when; the code is worded by the reader's catalogue. */
 const historyEntryFields = {
   id: identifier,
@@ -11,9 +21,10 @@ const historyEntryFields = {
   subject: z.strictObject({ kind: z.string(), id: identifier }),
   code: z.string(),
   values: z.record(z.string(), z.union([z.string(), z.number()])),
+  changes: z.array(fieldChangeSchema),
 };
 
-/** What those without cost see: what happened, without the content before and after. */
+/** What those without cost see: what happened, and which fields of a job’s things changed, nothing of money; without the whole content. */
 export const historyLineSchema = z.strictObject(historyEntryFields);
 
 /** What those who see cost see. */

@@ -152,6 +152,29 @@ describe('keeping a draft', () => {
     expect(changed.map((entry) => entry.values.name)).toEqual(['C']);
   });
 
+  it('tells in the history which fields changed, and those without cost nothing of money', async () => {
+    const sample = await sampleEstimate(api.ours);
+    await keep(sample.estimateId, [named(sample, 'Renamed', 1)]);
+    const { settings, settingsVersion } = (await read('owner', sample.estimateId)).body as CostedEstimate;
+    const profit = { way: 'margin', percent: '31' } as const;
+    await keep(sample.estimateId, [
+      { kind: 'settings', id: sample.estimateId, version: settingsVersion, content: { ...settings, profit } },
+    ]);
+    const changesOf = async (role: 'owner' | 'office', code: string) => {
+      const history = await api.as(role).call(listHistory, { query: { jobId: sample.jobId, limit: 50 } });
+      const { items } = history.body as { items: { code: string; changes: { path: string[]; after: unknown }[] }[] };
+      return items.filter((item) => item.code === code).flatMap(({ changes }) => changes);
+    };
+    const renamed = [{ path: ['name'], what: 'changed', before: sample.member.name, after: 'Renamed' }];
+    expect(await changesOf('owner', 'history-member-changed')).toEqual(renamed);
+    expect(await changesOf('office', 'history-member-changed')).toEqual(renamed);
+    const margin = (await changesOf('owner', 'history-settings-changed')).find(
+      ({ path }) => path.join() === 'profit,percent',
+    );
+    expect(margin?.after).toBe('31');
+    expect(await changesOf('office', 'history-settings-changed')).toEqual([]);
+  });
+
   it('reads an estimate in a number of queries that does not grow with its members', async () => {
     const [small, large] = [await sampleEstimate(api.ours), await sampleEstimate(api.ours)];
     const more = Array.from({ length: 30 }, (_, index): Change => ({

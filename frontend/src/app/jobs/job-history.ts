@@ -1,7 +1,9 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import type { Job } from '#shared/jobs/job-schema';
+import type { FieldChange } from '#shared/audit/field-changes';
 import type { WordCode } from '#shared/words/word-code';
+import { ChangeList } from '../audit';
 import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
 import { PagedList } from '../core/lists/paged-list';
@@ -13,12 +15,16 @@ interface Line {
   readonly text: string;
   readonly who: string;
   readonly when: string;
+  readonly changes: readonly FieldChange[];
 }
+
+/** So many changes are read at a glance; more of them wait behind their number. */
+const glance = 4;
 
 /** What was done on a job, newest first. */
 @Component({
   selector: 'app-job-history',
-  imports: [MatButton, Skeleton],
+  imports: [ChangeList, MatButton, Skeleton],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @if (list.problem(); as problem) {
@@ -33,6 +39,14 @@ interface Line {
           <span class="muted small">{{ line.when }}</span>
           <span class="text">{{ line.text }}</span>
           <span class="muted small">{{ line.who }}</span>
+          @if (line.changes.length > glance) {
+            <details class="changes">
+              <summary i18n>{{ line.changes.length }} fields</summary>
+              <app-change-list [changes]="line.changes" />
+            </details>
+          } @else if (line.changes.length > 0) {
+            <app-change-list class="changes" [changes]="line.changes" />
+          }
         </li>
       }
     </ol>
@@ -63,7 +77,24 @@ interface Line {
       overflow-wrap: anywhere;
     }
 
+    .changes {
+      grid-column: 2 / -1;
+      padding: 4px 0;
+    }
+
+    summary {
+      width: fit-content;
+      min-height: var(--target);
+      color: var(--bole);
+      line-height: var(--target);
+      cursor: pointer;
+    }
+
     @media (max-width: 640px) {
+      .changes {
+        grid-column: 1 / -1;
+      }
+
       li {
         grid-template-columns: minmax(0, 1fr) auto;
       }
@@ -92,8 +123,10 @@ export class JobHistory {
   );
   protected readonly lines = computed(() => this.list.items().map((entry) => this.lineOf(entry)));
 
-  private lineOf({ id, at, name, code, values }: HistoryLine): Line {
+  protected readonly glance = glance;
+
+  private lineOf({ id, at, name, code, values, changes }: HistoryLine): Line {
     const when = `${this.formats.dayOf(at)}, ${this.formats.time(at)}`;
-    return { id, when, who: name, text: this.words.say(code as WordCode, values) };
+    return { id, when, who: name, changes, text: this.words.say(code as WordCode, values) };
   }
 }

@@ -26,7 +26,7 @@ const job: Job = {
   ...{ kind: 'new', reference: '', site: 'Saloon', note: '', state: 'open', changedAt: '2026-05-04T10:00:00.000Z' },
 };
 const opened = {
-  ...{ id: id(31), at: '2026-05-04T10:00:00.000Z', accountId: id(32), name: 'Imke Vale', before: null, after: null },
+  ...{ id: id(31), at: '2026-05-04T10:00:00.000Z', accountId: id(32), name: 'Imke Vale', before: null, after: null, changes: [] },
   ...{
     subject: { kind: 'job', id: id(11) },
     code: 'history-job-opened',

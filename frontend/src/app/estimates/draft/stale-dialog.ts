@@ -9,8 +9,8 @@ import {
   MatDialogTitle,
 } from '@angular/material/dialog';
 import { firstValueFrom } from 'rxjs';
-import { Formats } from '../../core/formats/formats';
-import { sideDifferences } from './side-differences';
+import { type FieldChange, fieldChanges } from '#shared/audit/field-changes';
+import { FieldWords } from '../../audit';
 import type { Conflict, Side } from './conflict';
 
 /** Two people changed one thing: both sides beside each other, and which is to stand. */
@@ -22,7 +22,7 @@ import type { Conflict, Side } from './conflict';
   styleUrl: './stale-dialog.scss',
 })
 export class StaleDialog {
-  private readonly formats = inject(Formats);
+  private readonly words = inject(FieldWords);
   protected readonly conflict = inject<Conflict>(MAT_DIALOG_DATA);
 
   protected readonly name = computed(() => {
@@ -31,9 +31,20 @@ export class StaleDialog {
     return 'name' in content ? content.name : content.title;
   });
   protected readonly differences = computed(() =>
-    sideDifferences(this.conflict.mine.content, this.conflict.theirs, this.formats),
+    fieldChanges(this.conflict.mine.content, this.conflict.theirs).map((change) => {
+      const { label, before, after } = this.words.of(change);
+      const [mine, theirs] = sides[change.what] ?? [before, after];
+      return { label, mine, theirs };
+    }),
   );
 }
+
+/** What stands on either side where there are no two values to show. */
+const sides: Readonly<Partial<Record<FieldChange['what'], readonly [string, string]>>> = {
+  added: ['–', $localize`is there`],
+  removed: [$localize`is there`, '–'],
+  moved: [$localize`in your order`, $localize`in their order`],
+};
 
 /** Asks until one side is chosen: closing the dialog is no answer. */
 export async function askWhichSide(injector: Injector, conflict: Conflict): Promise<Side> {

@@ -1,0 +1,3 @@
+export { ChangeList } from './change-list';
+export { FieldWords } from './field-words';
+export { fieldNames } from './field-names';
