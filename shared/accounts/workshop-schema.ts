@@ -1,8 +1,8 @@
 import * as z from 'zod';
 import { paperSizes, taxCategories } from '#shared/accounts/workshop-options';
-import { currencyCodes } from '#shared/money/currency-digits';
+import { currencyEntry } from '#shared/money/currency-schema';
 import { complain } from '#shared/problems/complaints-of';
-import { identifier, line, optionalLine, version } from '#shared/problems/entry-schema';
+import { identifier, line, optionalEmailAddress, optionalLine, version } from '#shared/problems/entry-schema';
 import { lengthUnits } from '#shared/units/length-unit';
 
 const isKnown = (make: () => unknown): boolean => {
@@ -16,15 +16,14 @@ const isKnown = (make: () => unknown): boolean => {
 const isTimeZone = (name: string): boolean => isKnown(() => new Intl.DateTimeFormat('en', { timeZone: name }));
 const isLocale = (name: string): boolean => isKnown(() => Intl.getCanonicalLocales(name)[0]);
 
-/** An ISO 4217 code, an IANA time zone, a BCP 47 locale and an ISO 3166-1 country. */
-export const currencyCode = z.string().refine((code) => currencyCodes.includes(code), complain('entry-not-offered'));
+/** An IANA time zone, a BCP 47 locale and an ISO 3166-1 country. */
 const timeZone = z.string().max(60).refine(isTimeZone, complain('entry-not-offered'));
 const locale = z.string().max(35).refine(isLocale, complain('entry-not-offered'));
 const country = z.string().regex(/^[A-Z]{2}$/);
 
 /** What shows how a workshop writes figures, days and papers. */
 const habits = {
-  currency: currencyCode,
+  currency: currencyEntry,
   locale,
   lengthUnit: z.enum(lengthUnits),
   timeZone,
@@ -41,7 +40,7 @@ export const workshopSettingsSchema = z.strictObject({
   ...habits,
   addressLines: z.array(line(120)).max(6),
   telephone: optionalLine(40),
-  email: optionalLine(254),
+  email: optionalEmailAddress,
   taxRegistration: optionalLine(40),
   defaultTaxCategory: z.enum(taxCategories),
 });

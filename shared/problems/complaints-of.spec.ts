@@ -1,6 +1,7 @@
 import * as z from 'zod';
 import { lengthEntry } from '#shared/measure/length-schema';
-import { complaintsOf } from '#shared/problems/complaints-of';
+import { complaintsOf, readBy } from '#shared/problems/complaints-of';
+import { emailAddress } from '#shared/problems/entry-schema';
 import { formatsFor } from '#shared/units/formats-for';
 import type { LengthUnit } from '#shared/units/length-unit';
 import { en } from '#shared/words/en';
@@ -33,5 +34,35 @@ describe('A limit', () => {
   it('of a length is said in inches where one measures in inches', () => {
     // 100,000 mm / 25.4 = 3937.0079 in: the nearest 1/32 is the whole inch.
     expect(told({ length_mm: 200_000 }, 'in')).toEqual(['Must be less than ≈ 3937 in.']);
+  });
+});
+
+describe('An entry', () => {
+  const entries = z.strictObject({
+    name: z.string(),
+    count: z.int(),
+    way: z.enum(['share', 'run']),
+    email: emailAddress,
+  });
+  const codes = (value: object) =>
+    Object.fromEntries(
+      complaintsOf(readBy(entries, value).error as z.ZodError).map(({ path, code }) => [path.join('.'), code]),
+    );
+
+  it.each([
+    ['left out', {}],
+    ['empty', { name: null, count: null, way: '', email: '' }],
+  ])('that is %s is missing, whatever it should have been', (_, value) => {
+    const missing = 'entry-missing';
+    expect(codes(value)).toEqual({ name: missing, count: missing, way: missing, email: missing });
+  });
+
+  it('of another kind is not missing', () => {
+    expect(codes({ name: 7, count: '7', way: 7, email: 'desk at ashworth' })).toEqual({
+      name: 'entry-wrong-kind',
+      count: 'entry-wrong-kind',
+      way: 'entry-not-offered',
+      email: 'entry-not-email',
+    });
   });
 });

@@ -30,7 +30,12 @@ function tooBig(issue: Extract<Issue, { code: 'too_big' }>) {
   return plain(issue.inclusive ? 'entry-too-large' : 'entry-not-below', inUnitOf(issue.path, 'maximum', maximum));
 }
 
+/** Nothing stands there. Only a schema that was asked to report what it read (`readBy`) tells. */
+const isEmpty = (issue: Issue): boolean =>
+  'input' in issue && (issue.input === undefined || issue.input === null || issue.input === '');
+
 function worded(issue: Issue): Pick<Complaint, 'code' | 'values'> {
+  if (issue.code.startsWith('invalid_') && isEmpty(issue)) return plain('entry-missing');
   switch (issue.code) {
     case 'custom': {
       const own = issue.params as { code?: WordCode; values?: WordValues } | undefined;
@@ -41,10 +46,7 @@ function worded(issue: Issue): Pick<Complaint, 'code' | 'values'> {
     case 'too_big':
       return tooBig(issue);
     case 'invalid_type':
-      if (issue.expected === 'int') return plain('entry-not-whole');
-      return plain(
-        issue.input === undefined || issue.input === null || issue.input === '' ? 'entry-missing' : 'entry-wrong-kind',
-      );
+      return plain(issue.expected === 'int' ? 'entry-not-whole' : 'entry-wrong-kind');
     case 'invalid_format':
       return plain(issue.format === 'email' ? 'entry-not-email' : 'entry-wrong-form');
     case 'unrecognized_keys':
@@ -53,6 +55,10 @@ function worded(issue: Issue): Pick<Complaint, 'code' | 'values'> {
       return plain('entry-not-offered');
   }
 }
+
+/** Reads a value by its schema, so that `complaintsOf` can tell what is missing from what is of the wrong kind. */
+export const readBy = <S extends z.ZodType>(schema: S, value: unknown): z.ZodSafeParseResult<z.output<S>> =>
+  schema.safeParse(value, { reportInput: true });
 
 /** Every complaint of a failed parse, worded by code, in the order of the fields; an unknown key is complained of at its own path. */
 export function complaintsOf(error: z.core.$ZodError): Complaint[] {

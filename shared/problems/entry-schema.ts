@@ -33,7 +33,7 @@ export const paragraphs = (maximum: number) =>
 export const identifier = z.uuid().regex(/^[0-9a-f-]{36}$/);
 
 /** An e-mail address in small letters, at most 254 characters (RFC 5321). */
-export const emailAddress = z.string().trim().toLowerCase().max(254).pipe(z.email());
+export const emailAddress = z.string().trim().toLowerCase().min(1).max(254).pipe(z.email());
 
 const isWebAddress = (text: string): boolean => /^(https?:\/\/[^\s/?#@]+|mailto:[^\s@]+@[^\s@]+)[^\s]*$/i.test(text);
 

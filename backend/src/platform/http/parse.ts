@@ -1,7 +1,7 @@
 import type { Request } from 'express';
 import type { Endpoint } from '#shared/actor/endpoint';
 import type { Complaint } from '#shared/problems/complaint';
-import { complaintsOf } from '#shared/problems/complaints-of';
+import { complaintsOf, readBy } from '#shared/problems/complaints-of';
 import { Rejection } from '#shared/problems/rejection';
 import * as z from 'zod';
 
@@ -26,7 +26,7 @@ const sent = (request: Request, part: Part): unknown => (Buffer.isBuffer(request
 export function parseRequest(endpoint: Endpoint, request: Request): Parsed {
   const complaints: Complaint[] = [];
   const parse = (part: Part): unknown => {
-    const read = schemaOf(endpoint, part).safeParse(sent(request, part));
+    const read = readBy(schemaOf(endpoint, part), sent(request, part));
     if (read.success) return read.data;
     const at = part === 'body' ? [] : [part];
     complaints.push(

@@ -1,5 +1,5 @@
 import type { Complaint } from '#shared/problems/complaint';
-import { complaintsOf } from '#shared/problems/complaints-of';
+import { complaintsOf, readBy } from '#shared/problems/complaints-of';
 import { Rejection } from '#shared/problems/rejection';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { rateCardSchema } from '#shared/rate-cards/rate-card-schema';
@@ -59,7 +59,7 @@ export async function readCardWorkbook(bytes: Buffer, currency: string): Promise
     if (!sheet) building.complain([nameOf(table)], 'workbook-sheet-missing');
     else if (hasWhatItStandsIn(table, sheets)) readTable({ table, sheet, currency }, building);
   }
-  const parsed = rateCardSchema.safeParse(building.card, { reportInput: true });
+  const parsed = readBy(rateCardSchema, building.card);
   const found = parsed.success ? [] : ofSchema(parsed.error, building);
   if (parsed.success && building.complaints.length === 0) return parsed.data;
   refuse([...building.complaints, ...found]);

@@ -4,7 +4,7 @@ import type { FormControl } from '@angular/forms';
 import { type AbstractControl, FormArray, FormGroup, ValueChangeEvent, TouchedChangeEvent } from '@angular/forms';
 import { Subject, filter, switchMap } from 'rxjs';
 import type * as z from 'zod';
-import { complaintsOf } from '#shared/problems/complaints-of';
+import { complaintsOf, readBy } from '#shared/problems/complaints-of';
 import { Formats } from '../formats/formats';
 import { Words } from '../formats/words';
 import { documentControls, enteredDocument, type TypedTexts } from './document-controls';
@@ -153,7 +153,7 @@ export class DocumentForm<S extends z.ZodType> {
   private parse(): void {
     const { value, typed } = enteredDocument(this.root(), this.writing());
     const whole = this.hasTyped() ? { ...(value as object), typed } : value;
-    const parsed = this.schema.safeParse(whole);
+    const parsed = readBy(this.schema, whole);
     this.entries.set(whole);
     this.result.set(parsed.success ? parsed.data : undefined);
     this.remarks.set(parsed.success ? [] : complaintsOf(parsed.error).map((complaint) => this.remarkOf(complaint)));

@@ -3,7 +3,7 @@ import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { type AbstractControl, type FormGroup, TouchedChangeEvent, ValueChangeEvent } from '@angular/forms';
 import { filter } from 'rxjs';
 import type * as z from 'zod';
-import { complaintsOf } from '#shared/problems/complaints-of';
+import { complaintsOf, readBy } from '#shared/problems/complaints-of';
 import { Words } from '../formats/words';
 import { ProblemError } from '../problems/problem-error';
 import { entered, schemaControls, type Entries, type SchemaControls } from './schema-controls';
@@ -114,7 +114,7 @@ export class SchemaForm<S extends z.ZodObject> {
   }
 
   private parse(): void {
-    const parsed = this.schema.safeParse(entered(this.schema, this.group.getRawValue() as Record<string, unknown>));
+    const parsed = readBy(this.schema, entered(this.schema, this.group.getRawValue() as Record<string, unknown>));
     const complaints = parsed.success ? [] : complaintsOf(parsed.error);
     this.own = complaints.map(({ path, code, values }) => ({
       path: path.join('.'),

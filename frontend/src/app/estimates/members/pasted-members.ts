@@ -2,7 +2,7 @@ import type { MemberContent } from '#shared/estimates/member';
 import { memberContentSchema } from '#shared/estimates/member-schema';
 import type { ShapeKind } from '#shared/measure/shape';
 import { shapeDefaults } from '#shared/measure/shape-defaults';
-import { complaintsOf } from '#shared/problems/complaints-of';
+import { complaintsOf, readBy } from '#shared/problems/complaints-of';
 import { type LengthReading, parseLength } from '#shared/units/parse-length';
 import type { WordCode, WordValues } from '#shared/words/word-code';
 import { newMember } from './new-member';
@@ -59,7 +59,7 @@ function contentOf(cells: readonly string[], lengths: readonly ReadLength[], { k
 /** Reads one line: what cannot be read or cannot be is said at its cell. */
 function pastedMember(cells: readonly string[], pasting: Pasting): PastedMember {
   const lengths = pasting.lengths.map((name, at) => readLength(name, cells[at + 2] ?? '', pasting.reading));
-  const parsed = memberContentSchema.safeParse(contentOf(cells, lengths, pasting));
+  const parsed = readBy(memberContentSchema, contentOf(cells, lengths, pasting));
   const complaints = parsed.success ? [] : complaintsOf(parsed.error);
   const at = (path: string) => complaints.find((complaint) => complaint.path.join('.') === path);
   const [name = '', count = ''] = cells;

@@ -1,7 +1,7 @@
 import type { ExtraLine } from '#shared/estimates/settings';
 import { extraLineSchema } from '#shared/estimates/settings-schema';
 import type { Complaint } from '#shared/problems/complaint';
-import { complaintsOf } from '#shared/problems/complaints-of';
+import { complaintsOf, readBy } from '#shared/problems/complaints-of';
 import { parseNumber } from '#shared/units/parse-number';
 
 /** The cells of a further line that are typed in its table; which of its entries each is depends on the kind of line. */
@@ -55,7 +55,7 @@ export function typedCell(line: ExtraLine, typed: { cell: ExtraCell; text: strin
   if (!entry) return { ok: true, line };
   const read = typedValue(entry, typed.text, locale);
   if (!read.ok) return read;
-  const parsed = extraLineSchema.safeParse({ ...line, [entry.entry]: read.value });
+  const parsed = readBy(extraLineSchema, { ...line, [entry.entry]: read.value });
   if (parsed.success) return { ok: true, line: parsed.data };
   const [{ code, values }] = complaintsOf(parsed.error);
   return { ok: false, code, values };

@@ -1,6 +1,6 @@
 import { Injectable, computed, inject, resource, signal } from '@angular/core';
 import { Subject } from 'rxjs';
-import { complaintsOf } from '#shared/problems/complaints-of';
+import { complaintsOf, readBy } from '#shared/problems/complaints-of';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { rateCardSchema } from '#shared/rate-cards/rate-card-schema';
 import { rateCardName, type RateCardSummary } from '#shared/rate-cards/rate-card-summary-schema';
@@ -61,10 +61,7 @@ export class CardStore {
   private readonly complaints = computed<readonly Remark[]>(() => {
     const entered = this.entered();
     if (!entered || !this.isEditable()) return [];
-    const [name, content] = [
-      rateCardName.safeParse(entered.name, { reportInput: true }),
-      rateCardSchema.safeParse(entered.content, { reportInput: true }),
-    ];
+    const [name, content] = [readBy(rateCardName, entered.name), readBy(rateCardSchema, entered.content)];
     const ofName = name.success ? [] : complaintsOf(name.error).map((one) => ({ ...one, path: ['name'] }));
     const ofContent = content.success ? [] : complaintsOf(content.error);
     const told = [...ofName, ...ofContent].map(({ path, code, values }) => ({
