@@ -7,8 +7,8 @@ export function exchangeFindings({ kind, content, currency, account }: InvoiceIn
   const bearsAllowances =
     content.allowancesCharges.length > 0 || content.lines.some((line) => line.allowancesCharges.length > 0);
   return [
-    ...when(content.pricesHold === 'gross' && bearsAllowances, 'refuse', 'invoice-gross-allowances'),
-    ...when(kind === 'invoice' && account === null, 'warn', 'invoice-account-missing'),
-    ...when(!isExchangeCurrency(currency), 'note', 'invoice-currency-no-data', { currency }),
+    ...when(content.pricesHold === 'gross' && bearsAllowances, ['refuse', 'invoice-gross-allowances']),
+    ...when(kind === 'invoice' && account === null, ['warn', 'invoice-account-missing']),
+    ...when(!isExchangeCurrency(currency), ['note', 'invoice-currency-no-data'], { currency }),
   ];
 }

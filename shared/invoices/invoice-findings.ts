@@ -8,12 +8,11 @@ import type { Finding } from '#shared/words/finding';
 function partyFindings({ content, seller }: InvoiceInHand): Finding[] {
   const numbers = [seller.vatId, seller.taxNumber, seller.companyNumber];
   return [
-    ...when(content.lines.length === 0, 'refuse', 'invoice-no-lines'),
-    ...when(content.buyer.address.trim() === '', 'warn', 'invoice-buyer-address'),
+    ...when(content.lines.length === 0, ['refuse', 'invoice-no-lines']),
+    ...when(content.buyer.address.trim() === '', ['warn', 'invoice-buyer-address']),
     ...when(
       numbers.every((number) => number === ''),
-      'refuse',
-      'invoice-seller-number',
+      ['refuse', 'invoice-seller-number'],
     ),
   ];
 }
@@ -23,9 +22,9 @@ function dueFindings({ kind, content, worked, dueOn, issuedOn }: InvoiceInHand):
   const { due_minor } = worked.totals;
   const isUndated = due_minor > 0 && dueOn === null && content.terms.trim() === '';
   return [
-    ...when(due_minor < 0, 'refuse', 'invoice-below-nothing', { due_minor }),
-    ...when(kind === 'invoice' && isUndated, 'refuse', 'invoice-due-missing'),
-    ...when(dueOn !== null && compareDays(dueOn, issuedOn) < 0, 'refuse', 'invoice-due-early'),
+    ...when(due_minor < 0, ['refuse', 'invoice-below-nothing'], { due_minor }),
+    ...when(kind === 'invoice' && isUndated, ['refuse', 'invoice-due-missing']),
+    ...when(dueOn !== null && compareDays(dueOn, issuedOn) < 0, ['refuse', 'invoice-due-early']),
   ];
 }
 

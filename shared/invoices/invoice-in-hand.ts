@@ -18,5 +18,8 @@ export interface InvoiceInHand {
 }
 
 /** A finding where something is so, none where it is not. */
-export const when = (isSo: boolean, kind: Finding['kind'], code: WordCode, values: WordValues = {}): Finding[] =>
-  isSo ? [{ kind, code, values }] : [];
+export const when = (
+  isSo: boolean,
+  [kind, code]: readonly [Finding['kind'], WordCode],
+  values: WordValues = {},
+): Finding[] => (isSo ? [{ kind, code, values }] : []);

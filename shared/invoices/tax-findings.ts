@@ -14,12 +14,12 @@ function numberFindings({ content, seller }: InvoiceInHand, codes: ReadonlySet<T
   const { vatId, companyNumber } = content.buyer;
   const isAnonymous = seller.vatId === '' && seller.taxNumber === '';
   return [
-    ...when(has(needsSellerTaxId) && isAnonymous, 'refuse', 'invoice-seller-tax-number'),
-    ...when(has(needsSellerVatId) && seller.vatId === '', 'refuse', 'invoice-seller-vat-number'),
-    ...when(codes.has('AE') && vatId === '' && companyNumber === '', 'refuse', 'invoice-buyer-number'),
-    ...when(codes.has('K') && vatId === '', 'refuse', 'invoice-buyer-vat-number'),
+    ...when(has(needsSellerTaxId) && isAnonymous, ['refuse', 'invoice-seller-tax-number']),
+    ...when(has(needsSellerVatId) && seller.vatId === '', ['refuse', 'invoice-seller-vat-number']),
+    ...when(codes.has('AE') && vatId === '' && companyNumber === '', ['refuse', 'invoice-buyer-number']),
+    ...when(codes.has('K') && vatId === '', ['refuse', 'invoice-buyer-vat-number']),
     // Under O no VAT number is written at all (BR-O-02), so something else has to say who sells (BR-CO-26).
-    ...when(codes.has('O') && seller.companyNumber === '', 'refuse', 'invoice-seller-company-number'),
+    ...when(codes.has('O') && seller.companyNumber === '', ['refuse', 'invoice-seller-company-number']),
   ];
 }
 
@@ -27,14 +27,17 @@ function numberFindings({ content, seller }: InvoiceInHand, codes: ReadonlySet<T
 function companyFindings({ content, country }: InvoiceInHand, codes: ReadonlySet<TaxCode>): Finding[] {
   const isItalian = country === 'IT' && content.buyer.country === 'IT';
   return [
-    ...when(codes.has('O') && codes.size > 1, 'refuse', 'invoice-outside-scope-alone'),
-    ...when(codes.has('B') && (!isItalian || codes.has('S')), 'refuse', 'invoice-split-payment'),
+    ...when(codes.has('O') && codes.size > 1, ['refuse', 'invoice-outside-scope-alone']),
+    ...when(codes.has('B') && (!isItalian || codes.has('S')), ['refuse', 'invoice-split-payment']),
   ];
 }
 
 /** BR-IC-11: a supply within the Union says when it was delivered. */
 const deliveryFindings = ({ content }: InvoiceInHand, codes: ReadonlySet<TaxCode>): Finding[] =>
-  when(codes.has('K') && content.deliveredOn === null && content.period === null, 'refuse', 'invoice-delivery-missing');
+  when(codes.has('K') && content.deliveredOn === null && content.period === null, [
+    'refuse',
+    'invoice-delivery-missing',
+  ]);
 
 /** What the tax categories of an invoice ask for (EN 16931; the rules are named beside each check). */
 export function taxFindings(hand: InvoiceInHand): Finding[] {
@@ -44,10 +47,9 @@ export function taxFindings(hand: InvoiceInHand): Finding[] {
   return [
     ...when(
       rates.some(({ code, percent }) => code === 'S' && Number(percent) === 0),
-      'refuse',
-      'invoice-standard-rate',
+      ['refuse', 'invoice-standard-rate'],
     ),
-    ...unexplained.flatMap((code) => when(true, 'refuse', 'invoice-exemption-missing', { code })),
+    ...unexplained.flatMap((code) => when(true, ['refuse', 'invoice-exemption-missing'], { code })),
     ...numberFindings(hand, codes),
     ...companyFindings(hand, codes),
     ...deliveryFindings(hand, codes),

@@ -1,0 +1,75 @@
+import * as z from 'zod';
+import { endpoint, sameForPriced } from '#shared/actor/endpoint';
+import { oneInvoice } from '#shared/invoices/invoices-endpoints';
+import { journalSchema, owedSchema, periodQuery, statementSchema } from '#shared/invoices/payment-schema';
+import { identifier, paragraphs } from '#shared/problems/entry-schema';
+
+const oneClient = z.strictObject({ clientId: identifier });
+
+export const readOwed = endpoint({
+  name: 'readOwed',
+  summary: 'What is owed today, by client and age, and what lies to clients’ credit',
+  method: 'get',
+  path: '/api/owed',
+  callers: ['owner', 'estimator', 'office'],
+  answers: sameForPriced(
+    z.strictObject({ day: z.string(), currency: z.string(), items: z.array(owedSchema), open_minor: z.int() }),
+  ),
+});
+
+export const readStatement = endpoint({
+  name: 'readStatement',
+  summary: 'The account of a client from one day to another',
+  method: 'get',
+  path: '/api/clients/:clientId/statement',
+  callers: ['owner', 'estimator', 'office'],
+  params: oneClient,
+  query: periodQuery,
+  answers: sameForPriced(statementSchema),
+});
+
+export const readStatementPaper = endpoint({
+  name: 'readStatementPaper',
+  summary: 'The same as a PDF',
+  method: 'get',
+  path: '/api/clients/:clientId/statement.pdf',
+  callers: ['owner', 'estimator', 'office'],
+  params: oneClient,
+  query: periodQuery,
+  media: 'application/pdf',
+  answers: sameForPriced(z.unknown()),
+});
+
+export const readJournal = endpoint({
+  name: 'readJournal',
+  summary: 'Every invoice, credit note, payment, refund and write-off of a time, with the sums of each kind',
+  method: 'get',
+  path: '/api/journal',
+  callers: ['owner', 'office'],
+  query: periodQuery,
+  answers: sameForPriced(journalSchema),
+});
+
+export const readJournalFile = endpoint({
+  name: 'readJournalFile',
+  summary: 'The same for the accountant, as a workbook or as comma-separated values',
+  method: 'get',
+  path: '/api/journal/:form',
+  callers: ['owner', 'office'],
+  params: z.strictObject({ form: z.enum(['journal.csv', 'journal.xlsx']) }),
+  query: periodQuery,
+  media: 'application/octet-stream',
+  answers: sameForPriced(z.unknown()),
+});
+
+export const remindOfInvoice = endpoint({
+  name: 'remindOfInvoice',
+  summary: 'Remind the buyer by mail of an invoice that is overdue',
+  method: 'post',
+  path: '/api/invoices/:invoiceId/reminders',
+  callers: ['owner', 'office'],
+  params: oneInvoice,
+  body: z.strictObject({ note: paragraphs(1000) }),
+  idempotent: true,
+  answers: {},
+});
