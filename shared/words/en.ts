@@ -4,6 +4,7 @@ import { buildups } from '#shared/words/en/buildups';
 import { cardChoices } from '#shared/words/en/card-choices';
 import { cardTables } from '#shared/words/en/card-tables';
 import { carving } from '#shared/words/en/carving';
+import { clientPage } from '#shared/words/en/client-page';
 import { documents } from '#shared/words/en/documents';
 import { drying } from '#shared/words/en/drying';
 import { estimates } from '#shared/words/en/estimates';
@@ -39,5 +40,6 @@ export const en = {
   ...programmeBoard,
   ...documents,
   ...agreements,
+  ...clientPage,
   ...invoices,
 } as const;

@@ -8,6 +8,10 @@ import { firstPlace } from './shell/first-place';
 export const appRoutes: Routes = [
   ...strangerRoutes,
   {
+    path: 'client',
+    loadChildren: () => import('./client-page/client-page-routes').then(({ clientPageRoutes }) => clientPageRoutes),
+  },
+  {
     path: '',
     canMatch: [signedInGuard],
     loadComponent: () => import('./shell/shell').then(({ Shell }) => Shell),

@@ -1,0 +1,70 @@
+import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import type { ClientIssue } from '#shared/client-page/client-issue-schema';
+import { groupedBy } from '#shared/units/grouped-by';
+import { stripLayers } from '../buildups';
+import { Formats } from '../core/formats/formats';
+import { SectionStrip } from '../ui/drawing/section-strip';
+import { ClientIssueStore } from './client-issue-store';
+
+type Alternative = ClientIssue['alternatives'][number];
+type BuildUp = ClientIssue['buildUps'][number];
+
+/** The ways of doing part of it that are offered: of a group one is chosen, what stands by itself may be ticked. */
+@Component({
+  selector: 'app-client-choices',
+  imports: [SectionStrip],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './client-choices.html',
+  styleUrl: './client-choices.scss',
+})
+export class ClientChoices {
+  protected readonly store = inject(ClientIssueStore);
+  private readonly formats = inject(Formats);
+
+  private readonly offered = computed(() => this.store.issue()?.alternatives ?? []);
+  protected readonly groups = computed(() =>
+    [...groupedBy(this.grouped(), ({ group }) => group)].map(([name, options]) => ({ name, options })),
+  );
+  protected readonly extras = computed(() => this.offered().filter(({ group }) => group === ''));
+  protected readonly mayChoose = computed(() => this.store.mayAnswer() && this.store.issue()?.mayChoose === true);
+
+  protected isChosen(id: string): boolean {
+    return this.store.choice().includes(id);
+  }
+
+  protected hasBase(options: readonly Alternative[]): boolean {
+    return !options.some(({ id }) => this.isChosen(id));
+  }
+
+  protected take(options: readonly Alternative[], chosen?: Alternative): void {
+    const others = this.store.choice().filter((id) => !options.some((option) => option.id === id));
+    this.store.choose(chosen ? [...others, chosen.id] : others);
+  }
+
+  protected tick(extra: Alternative, isTicked: boolean): void {
+    const others = this.store.choice().filter((id) => id !== extra.id);
+    this.store.choose(isTicked ? [...others, extra.id] : others);
+  }
+
+  /** What it is more or less than the base, with a true minus. */
+  protected difference({ difference_minor }: Alternative): string {
+    if (difference_minor === 0) return $localize`no difference`;
+    const amount = this.formats.money(Math.abs(difference_minor));
+    return difference_minor > 0 ? `+ ${amount}` : `− ${amount}`;
+  }
+
+  /** The build-ups it brings, drawn as the section through their layers. */
+  protected strips({ after }: Alternative): { name: string; layers: ReturnType<typeof stripLayers> }[] {
+    return after.map(({ buildUp, layers, leaf }: BuildUp) => ({
+      name: buildUp,
+      layers: stripLayers(
+        layers.map((layer) => ({ ...layer, coats: layer.coats[1] })),
+        { timber: $localize`Wood`, leaf: leaf.join(', ') },
+      ),
+    }));
+  }
+
+  private grouped(): Alternative[] {
+    return this.offered().filter(({ group }) => group !== '');
+  }
+}

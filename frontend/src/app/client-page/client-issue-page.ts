@@ -1,0 +1,92 @@
+import {
+  ChangeDetectionStrategy,
+  Component,
+  ElementRef,
+  Injector,
+  afterNextRender,
+  computed,
+  effect,
+  inject,
+  input,
+  signal,
+} from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import { RouterLink } from '@angular/router';
+import { readClientPaper } from '#shared/client-page/client-issues-endpoints';
+import { addressOf } from '../core/api/address-of';
+import { Formats } from '../core/formats/formats';
+import { Words } from '../core/formats/words';
+import { PageTitle } from '../core/routing/page-title';
+import { Session } from '../core/session/session';
+import { EmptyState } from '../ui/page/empty-state';
+import { FindingList } from '../ui/page/finding-list';
+import { Skeleton } from '../ui/page/skeleton';
+import { ClientChoices } from './client-choices';
+import { ClientDecline } from './client-decline';
+import { ClientFrame } from './client-frame';
+import { ClientIssueStore } from './client-issue-store';
+import { ClientLines } from './client-lines';
+import { ClientPayments } from './client-payments';
+import { ClientPieces } from './client-pieces';
+import { ClientReview } from './client-review';
+import { ClientThread } from './client-thread';
+
+/** An estimate as its client reads it: the piece, the choices, the price, the terms, questions, and the answer. */
+@Component({
+  selector: 'app-client-issue-page',
+  imports: [
+    ...[ClientChoices, ClientDecline, ClientFrame, ClientLines, ClientPayments, ClientPieces, ClientReview],
+    ...[ClientThread, EmptyState, FindingList, MatButton, RouterLink, Skeleton],
+  ],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  providers: [ClientIssueStore],
+  templateUrl: './client-issue-page.html',
+  styleUrl: './client-issue-page.scss',
+})
+export class ClientIssuePage {
+  protected readonly store = inject(ClientIssueStore);
+  protected readonly formats = inject(Formats);
+  protected readonly words = inject(Words);
+  private readonly session = inject(Session);
+  private readonly title = inject(PageTitle, { optional: true });
+  private readonly injector = inject(Injector);
+  private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
+
+  readonly issueId = input.required<string>();
+
+  /** Reading it, looking at it for the last time, or declining it. */
+  protected readonly step = signal<'reading' | 'reviewing' | 'declining'>('reading');
+  protected readonly paper = computed(() =>
+    addressOf(readClientPaper, {
+      params: { issueId: this.issueId() },
+      query: { choice: this.store.choice().join(',') },
+    }),
+  );
+  protected readonly care = computed(() =>
+    (this.store.issue()?.care ?? []).map((code) => this.words.say(code as 'care-handling')),
+  );
+
+  constructor() {
+    effect(() => this.store.open(this.issueId()));
+    effect(() => this.session.visit(this.store.issue()?.letterhead));
+    effect(() => {
+      const issue = this.store.issue();
+      if (issue) this.title?.name(issue.job.title);
+    });
+  }
+
+  protected go(step: 'reading' | 'reviewing' | 'declining'): void {
+    this.step.set(step);
+    afterNextRender(() => this.toTheTop(), { injector: this.injector });
+  }
+
+  protected decided(): void {
+    this.store.reload();
+    this.go('reading');
+  }
+
+  private toTheTop(): void {
+    globalThis.scrollTo?.(0, 0);
+    this.host.nativeElement.querySelector<HTMLElement>('h1')?.focus();
+  }
+}

@@ -1,0 +1,10 @@
+import type { ClientIssueState } from '#shared/client-page/client-overview-schema';
+
+/** How it is said where an issue stands, to its client. */
+export const clientStateNames: Readonly<Record<ClientIssueState, string>> = {
+  open: $localize`waits for your answer`,
+  accepted: $localize`accepted`,
+  declined: $localize`declined`,
+  replaced: $localize`replaced by a later issue`,
+  'past-validity': $localize`no longer holds`,
+};
