@@ -9,11 +9,14 @@ import { MailCatcher, type CaughtMail } from '../../backend/src/platform/mail/ma
 import { openPlatform } from '../../backend/src/platform/open-platform';
 import type { Platform } from '../../backend/src/platform/platform';
 import { freshDatabase } from '../database/fresh-database';
+import { canary } from './canary';
+import { faultsOfLog } from './faults-of-log';
 import { MovingClock } from './moving-clock';
-import { addPerson, canary, openWorkshop, type Door, type TestPerson, type TestWorkshop } from './test-workshop';
+import { addPerson, openWorkshop, type Door, type TestPerson, type TestWorkshop } from './test-workshop';
 import { Visitor } from './visitor';
 
-export { canary, password, type TestPerson, type TestWorkshop } from './test-workshop';
+export { canary } from './canary';
+export { password, type TestPerson, type TestWorkshop } from './test-workshop';
 
 /** A whole server but for the socket, on a database of its own, with two workshops. */
 export interface Api {
@@ -33,6 +36,7 @@ export interface Api {
   stranger(headers?: Readonly<Record<string, string>>): Promise<Visitor>;
   /** Does the work behind the scenes and answers the mails, newest first. */
   mails(): Promise<CaughtMail[]>;
+  /** Ends it, and fails where its log holds a secret or an event that is not one line (ASVS 16.2.5, 16.4.1). */
   stop(): Promise<void>;
 }
 
@@ -58,6 +62,8 @@ async function openParts(environment: Environment) {
     await catcher.stop();
     await platform.database.close();
     await rm(folder, { recursive: true, force: true });
+    const faults = faultsOfLog(logLines);
+    if (faults.length > 0) throw new Error(`The log of this run: ${faults.slice(0, 5).join('; ')}`);
   };
   return { platform, clock, logLines, catcher, app: openApp(platform, catcher), stop };
 }

@@ -5,9 +5,6 @@ import type { App } from '../../backend/src/app';
 import type { Platform } from '../../backend/src/platform/platform';
 import { Visitor } from './visitor';
 
-/** Every text of the other workshop carries this word: it must never appear in an answer to ours. */
-export const canary = 'Kanarienvogel';
-
 /** The password of everybody in the tests. */
 export const password = 'seven grey herons wade';
 

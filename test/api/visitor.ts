@@ -2,6 +2,7 @@ import type { Express } from 'express';
 import request, { type Response, type Test } from 'supertest';
 import { signIn, readSession } from '#shared/accounts/session-endpoints';
 import type { Endpoint } from '#shared/actor/endpoint';
+import { noteCookie, noteSecret, noteSecretsOf } from './faults-of-log';
 
 /** What one call brings along; everything is optional so that a test may leave it out. */
 export interface Parts {
@@ -32,11 +33,17 @@ export class Visitor {
     test.on(
       'response',
       ({ headers, body }: { headers: Record<string, string[] | undefined>; body?: { token?: unknown } }) => {
-        for (const line of headers['set-cookie'] ?? []) this.cookie = line.split(';')[0] ?? '';
+        for (const line of headers['set-cookie'] ?? []) this.keep(line.split(';')[0] ?? '');
         if (typeof body?.token === 'string') this.token = body.token;
+        noteSecret(this.token);
       },
     );
     return test;
+  }
+
+  private keep(cookie: string): void {
+    this.cookie = cookie;
+    noteCookie(cookie.split('=')[1] ?? '');
   }
 
   /** Asks for the session, as the page does first of all. */
@@ -60,6 +67,7 @@ export class Visitor {
     if (parts.version !== undefined) test.set('if-match', `"${parts.version}"`);
     if (parts.key !== undefined) test.set('idempotency-key', parts.key);
     if (endpoint.upload && parts.file) return test.attach(endpoint.upload, parts.file.bytes, parts.file.name);
+    noteSecretsOf(parts.body);
     return parts.body === undefined ? test : test.send(parts.body as object);
   }
 }

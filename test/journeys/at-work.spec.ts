@@ -1,6 +1,7 @@
 import type { Page } from 'playwright-core';
 import { sampleEstimate, type SampleEstimate } from '../api/sample-estimate';
-import { phone, Walk } from './walk';
+import { phone } from './screens';
+import { Walk } from './walk';
 
 /** Wrong input, two people, the keyboard alone, and what the bench sees. */
 let walk: Walk;

@@ -3,8 +3,10 @@ import { createServer, type Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import { join } from 'node:path';
 import { chromium, type Browser, type BrowserContext, type Page } from 'playwright-core';
+import { noteCookie } from '../api/faults-of-log';
 import { startApi, type Api } from '../api/start-api';
 import { password } from '../api/test-workshop';
+import { desk, type Screen } from './screens';
 
 const root = join(__dirname, '../..');
 const pictures = join(__dirname, 'screenshots');
@@ -19,16 +21,6 @@ const quiet = [
   '--disable-component-update',
   '--disable-sync',
 ];
-
-/** How somebody looks at the pages. */
-export interface Screen {
-  readonly width: number;
-  readonly height: number;
-  readonly dark?: boolean;
-}
-
-export const desk: Screen = { width: 1440, height: 900 };
-export const phone: Screen = { width: 360, height: 780 };
 
 /** Somebody at a browser of their own. `complaints` gathers what the browser objected to. */
 export interface Person {
@@ -61,6 +53,9 @@ export class Walk {
   }
 
   async end(): Promise<void> {
+    for (const context of this.browser.contexts()) {
+      for (const { value } of await context.cookies()) noteCookie(value);
+    }
     await this.browser.close();
     await new Promise<void>((resolve) => {
       this.server.close(() => resolve());
@@ -70,11 +65,13 @@ export class Walk {
   }
 
   /** Somebody who was never here. */
-  async stranger({ width, height, dark = false }: Screen = desk): Promise<Person> {
+  async stranger({ width, height, dark = false, touch = false }: Screen = desk): Promise<Person> {
     const context = await this.browser.newContext({
       viewport: { width, height },
       colorScheme: dark ? 'dark' : 'light',
       reducedMotion: 'reduce',
+      hasTouch: touch,
+      isMobile: touch,
     });
     const page = await context.newPage();
     page.setDefaultTimeout(30_000);

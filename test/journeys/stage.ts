@@ -1,0 +1,80 @@
+import { randomUUID } from 'node:crypto';
+import { v7 as newId } from 'uuid';
+import type { Response } from 'supertest';
+import { invite } from '#shared/accounts/people-endpoints';
+import type { Endpoint } from '#shared/actor/endpoint';
+import type { Change } from '#shared/estimates/change-schema';
+import { changeEstimate } from '#shared/estimates/estimates-endpoints';
+import { issueEstimate } from '#shared/estimates/issues-endpoints';
+import { draftCard } from '../api/sample-card';
+import { sampleEstimate, sampleMember, type SampleEstimate } from '../api/sample-estimate';
+import { sampleClient, sampleJob } from '../api/sample-job';
+import type { Parts } from '../api/visitor';
+import type { Person, Walk } from './walk';
+
+/** Something of everything there is, so that every page, dialog and menu can be opened on it. */
+export interface Stage {
+  readonly walk: Walk;
+  /** Two pieces with three members; nothing of it was issued. */
+  readonly sample: SampleEstimate;
+  readonly furtherMemberIds: readonly string[];
+  /** One that was issued. */
+  readonly issued: SampleEstimate & { readonly issueId: string };
+  readonly jobClientId: string;
+  readonly bareClientId: string;
+  readonly bareJobId: string;
+  readonly rateCardId: string;
+}
+
+/** A stage with somebody on it. */
+export interface Scene extends Stage {
+  readonly person: Person;
+}
+
+/** Asks as the owner, and answers only what succeeded. */
+export async function done({ api }: Walk, endpoint: Endpoint, parts: Parts): Promise<Response> {
+  const response = await api.as('owner').call(endpoint, parts);
+  if (response.status >= 300) throw new Error(`${endpoint.name}: ${response.status} ${response.text}`);
+  return response;
+}
+
+async function secondPiece(walk: Walk, { estimateId }: SampleEstimate): Promise<string[]> {
+  const pieceId = newId();
+  const members = ['Second frieze', 'Third frieze'].map((name) => ({
+    id: newId(),
+    content: sampleMember(pieceId, name),
+  }));
+  const changes: Change[] = [
+    { kind: 'piece', id: pieceId, version: 0, content: { name: 'Second piece', place: 2, note: '' } },
+    ...members.map((member): Change => ({ kind: 'member', version: 0, ...member })),
+  ];
+  await done(walk, changeEstimate, { params: { estimateId }, body: { changes } });
+  return members.map(({ id }) => id);
+}
+
+export async function issueOf(walk: Walk, { estimateId }: SampleEstimate, note = ''): Promise<string> {
+  const { version } = (await walk.api.app.estimates.drafts.whole(walk.api.ours.id, estimateId)).estimate;
+  const body = { version, note, acceptsOldCard: true };
+  const response = await done(walk, issueEstimate, { params: { estimateId }, body, key: randomUUID() });
+  return (response.body as { id: string }).id;
+}
+
+export async function setStage(walk: Walk): Promise<Stage> {
+  const { ours, app } = walk.api;
+  const [sample, other] = [await sampleEstimate(ours), await sampleEstimate(ours)];
+  const furtherMemberIds = await secondPiece(walk, sample);
+  await done(walk, invite, {
+    body: { name: 'Herons guest', email: 'guest@herons.example', roles: ['bench'] },
+    key: randomUUID(),
+  });
+  return {
+    walk,
+    sample,
+    furtherMemberIds,
+    issued: { ...other, issueId: await issueOf(walk, other) },
+    jobClientId: (await app.jobs.job(ours.id, sample.jobId)).clientId,
+    bareClientId: await sampleClient(ours),
+    bareJobId: await sampleJob(ours),
+    rateCardId: (await draftCard(ours)).id,
+  };
+}
