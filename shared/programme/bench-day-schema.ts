@@ -1,11 +1,8 @@
 import * as z from 'zod';
 import { day, identifier, instant } from '#shared/problems/entry-schema';
+import { benchStates, type BenchTask } from '#shared/programme/bench-task';
 import { programmeId } from '#shared/programme/programme-schema';
 import { reasonSchema } from '#shared/words/reason-schema';
-
-/** Where a task stands at the bench: `drying` waits for a coat to dry, `waiting` for other work or somebody's approval. */
-export const benchStates = ['finished', 'started', 'ready', 'drying', 'waiting'] as const;
-export type BenchState = (typeof benchStates)[number];
 
 /** One thing to do, in the order of the day; nothing of cost. */
 export const benchTaskSchema = z.strictObject({
@@ -32,8 +29,7 @@ export const benchTaskSchema = z.strictObject({
   /** When it has to be begun or ended at the latest. */
   windowClosesAt: instant.nullable(),
   waits: z.array(reasonSchema),
-});
-export type BenchTask = z.infer<typeof benchTaskSchema>;
+}) satisfies z.ZodType<BenchTask>;
 
 /** The day of one person; `person` null: nobody at the bench bears this sign-in. */
 export const benchDaySchema = z.strictObject({

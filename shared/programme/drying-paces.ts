@@ -34,9 +34,35 @@ function stretchesOf(air: ProgrammeAir, frame: ProgrammeFrame): Stretch[] {
 /** Spirit goes off at its own pace, so it needs none. */
 const pacedModels = ['water', 'oil'] as const satisfies readonly ClimateModel[];
 
+/** Air in which nothing dries stops the drying for as long as it lasts. */
+const standstill = 1e6;
+
+const joined = (stretches: Pace['stretches']): Pace['stretches'] =>
+  stretches.filter(({ factor }, at) => at === 0 || stretches[at - 1].factor !== factor);
+
+function paceOf(model: ClimateModel, stretches: readonly Stretch[], card: DryingCard) {
+  const worked = stretches.map(({ from_minutes, climate }) => ({
+    from_minutes,
+    air: dryingFactor(model, climate, card),
+  }));
+  return {
+    pace: {
+      id: model,
+      stretches: joined(worked.map(({ from_minutes, air }) => ({ from_minutes, factor: air.factor ?? standstill }))),
+    },
+    findings: worked.flatMap(({ air }) => air.findings),
+  };
+}
+
+/** Each finding once; a month in which nothing dries is no reason to refuse the rest of the year. */
+function toldOnce(findings: readonly Finding[], byMonth: boolean): Finding[] {
+  const told = new Map(findings.map((finding) => [JSON.stringify(finding), finding]));
+  return [...told.values()].map((one) => (one.kind === 'refuse' && byMonth ? { ...one, kind: 'warn' } : one));
+}
+
 /**
  * How fast water-borne and oil coats dry through the year against 20 °C and 50 % RH (`dryingFactor`: VPD for water, a doubling by 10 °C for oil), by
- * model. Air in which nothing dries soundly is told once by model, and counted as the slowest the card knows.
+ * model. Air in which nothing dries soundly is refused where it is the same throughout; by month it stops the drying and is told.
  */
 export function dryingPaces(
   air: ProgrammeAir,
@@ -44,27 +70,10 @@ export function dryingPaces(
   card: DryingCard,
 ): { readonly paces: Pace[]; readonly findings: Finding[] } {
   const stretches = stretchesOf(air, frame);
-  const findings: Finding[] = [];
-  const paces = pacedModels.map((model): Pace => {
-    const worked = stretches.map(({ from_minutes, climate }) => ({
-      from_minutes,
-      ...dryingFactor(model, climate, card),
-    }));
-    const told = worked.flatMap(({ findings: own }) => own);
-    for (const finding of told)
-      if (!findings.some((known) => JSON.stringify(known) === JSON.stringify(finding))) findings.push(finding);
-    return {
-      id: model,
-      stretches: joined(
-        worked.map(({ from_minutes, factor }) => ({ from_minutes, factor: factor ?? card.mostFactor })),
-      ),
-    };
-  });
-  return { paces, findings };
+  const worked = pacedModels.map((model) => paceOf(model, stretches, card));
+  const findings = worked.flatMap((one) => one.findings);
+  return { paces: worked.map(({ pace }) => pace), findings: toldOnce(findings, isByMonth(air)) };
 }
-
-const joined = (stretches: Pace['stretches']): Pace['stretches'] =>
-  stretches.filter(({ factor }, at) => at === 0 || stretches[at - 1].factor !== factor);
 
 /** The pace of a model of drying; null for spirit. */
 export const paceOfModel = (model: ClimateModel): string | null => (model === 'spirit' ? null : model);

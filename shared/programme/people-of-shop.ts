@@ -2,7 +2,7 @@ import { addDays } from '#shared/calendar/add-days';
 import { minutesOfDay, type ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { PromisedWork } from '#shared/programme/promised-work';
 import type { Shop, ShopPerson } from '#shared/programme/shop';
-import { dayExceptions, weekHours } from '#shared/programme/shop-calendar-of';
+import { weekHours } from '#shared/programme/shop-calendar-of';
 import type { MomentSpan, Person } from '#shared/programme/shop-calendar';
 import type { Place } from '#shared/programme/programme-request';
 
@@ -11,17 +11,6 @@ const absencesOf = ({ absences }: ShopPerson, frame: ProgrammeFrame): MomentSpan
     start_minutes: minutesOfDay(firstDay, frame),
     end_minutes: minutesOfDay(addDays(lastDay, 1), frame),
   }));
-
-/** Spans in order, those that touch or overlap made one. */
-export function joinedSpans(spans: readonly MomentSpan[]): MomentSpan[] {
-  const joined: MomentSpan[] = [];
-  for (const span of [...spans].sort((one, other) => one.start_minutes - other.start_minutes)) {
-    const last = joined.at(-1);
-    if (!last || span.start_minutes > last.end_minutes) joined.push(span);
-    else joined[joined.length - 1] = { ...last, end_minutes: Math.max(last.end_minutes, span.end_minutes) };
-  }
-  return joined;
-}
 
 function promisedSpans(personId: string, promised: readonly PromisedWork[]): MomentSpan[] {
   return promised.flatMap(({ people }) =>
@@ -37,13 +26,8 @@ export const peopleOfShop = (shop: Shop, frame: ProgrammeFrame, promised: readon
     id: person.id,
     gradeIds: person.gradeIds,
     week: person.hours ? weekHours(person.hours) : null,
-    exceptions: person.hours
-      ? dayExceptions(
-          shop.days.filter(({ hours }) => hours.length === 0),
-          frame.firstDay,
-        )
-      : [],
-    away: joinedSpans([...absencesOf(person, frame), ...promisedSpans(person.id, promised)]),
+    exceptions: [],
+    away: [...absencesOf(person, frame), ...promisedSpans(person.id, promised)],
   }));
 
 /** Racks and benches with what of them is promised elsewhere. */

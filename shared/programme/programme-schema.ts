@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import { stepKinds } from '#shared/buildups/buildup';
+import { holdPoints, stepKinds } from '#shared/buildups/buildup';
 import { climateSchema } from '#shared/drying/drying-card-schema';
 import { complainAt } from '#shared/problems/card-entry-schema';
 import { complain } from '#shared/problems/complaints-of';
@@ -109,6 +109,16 @@ export const programmeItemSchema = z.strictObject({
   handsOn_minutes: z.int(),
 }) satisfies z.ZodType<ProgrammeItem>;
 
+/** An approval that is waited for, or was given. */
+export const programmeApprovalSchema = z.strictObject({
+  approvalId: z.string(),
+  hold: z.enum(holdPoints),
+  name: z.string(),
+  beforeTaskId: z.string(),
+  usual_days: z.int(),
+  givenAt: instant.nullable(),
+});
+
 export const taskMarkSchema = z.strictObject({
   taskId: z.string(),
   startedAt: instant,
@@ -143,6 +153,8 @@ export const programmeSchema = z.strictObject({
   ...programmeFrame,
   request: programmeRequestSchema,
   items: z.array(programmeItemSchema),
+  /** What is approved by each of the request's approvals. */
+  approvals: z.array(programmeApprovalSchema),
   /** What stands in the way of planning, or is to be known of it, before anything is planned. */
   findings: z.array(findingSchema),
   plan: programmePlanSchema.nullable(),

@@ -32,15 +32,17 @@ export const programmeBoard = {
     'Assumed: {people, plural, one {one person} other {# people}} at work, {share_percent} of their hours productive.',
   'programme-assumes-air': 'Assumed: {temperature_celsius} and {humidity_percent} in the workshop throughout.',
   'programme-assumes-months': 'Assumed: the air of the workshop month by month.',
-  'programme-assumes-approval':
-    'Assumed: {approval}, {days, plural, =0 {at once} one {within one working day} other {within # working days}}.',
+  'programme-assumes-estimate-air': 'Assumed: the air of the workshop as the estimate has it.',
+  'programme-assumes-carving':
+    'Assumed: the carving of {name} is approved within {days, plural, one {one working day} other {# working days}}.',
+  'programme-assumes-sample':
+    'Assumed: the sample board for {name} is approved within {days, plural, one {one working day} other {# working days}} of the start.',
+  'programme-assumes-top':
+    'Assumed: the top is fitted dry to {name} within {days, plural, one {one working day} other {# working days}}.',
   'programme-assumes-in-hand':
     'Kept in hand before the day offered: {days, plural, one {one working day} other {# working days}}.',
   'programme-assumes-promised':
     'Planned around {jobs, plural, =0 {no other work} one {one other job} other {# other jobs}}.',
-  'programme-approval-carving': 'the carving of {member} approved',
-  'programme-approval-sample': 'the sample board for {lot} approved',
-  'programme-approval-top': 'the top fitted dry to {piece}',
   'what-if-set-up': 'Further hands: {days, plural, one {one day} other {# days}} set up at {hours_hours} each.',
   'history-shop-changed': 'Changed hours, places and people of the workshop',
   'history-programme-changed': 'Changed the programme of estimate {number}',

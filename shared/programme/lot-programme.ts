@@ -1,0 +1,22 @@
+import type { ProgrammeItem } from '#shared/programme/programme-item';
+import type { ApprovalHold, PlaceHold, ProgrammeLag, ProgrammeTask } from '#shared/programme/programme-request';
+import type { HoldPoint } from '#shared/buildups/buildup';
+
+/** A task with what it is for whoever reads it. */
+export interface ItemTask {
+  readonly task: ProgrammeTask;
+  readonly item: ProgrammeItem;
+}
+
+/** An approval that is waited for: what kind, and what is approved. */
+export interface ProgrammeApproval extends ApprovalHold {
+  readonly hold: HoldPoint;
+}
+
+/** The part of a request one lot, or the carving of one member, brings. */
+export interface ProgrammePart {
+  readonly tasks: readonly ItemTask[];
+  readonly lags: readonly ProgrammeLag[];
+  readonly approvals: readonly ProgrammeApproval[];
+  readonly placeHolds: readonly PlaceHold[];
+}
