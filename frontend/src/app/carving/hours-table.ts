@@ -3,6 +3,7 @@ import { tripleSum } from '#shared/units/triple-sum';
 import { Formats } from '../core/formats/formats';
 import type { Explained } from '../ui/figure/explained';
 import type { FigureColumn } from '../ui/table/figure-column';
+import { smallScreen } from '../ui/screen/small-screen';
 import { FigureTable } from '../ui/table/figure-table';
 import type { NamedHours } from './stage-hours';
 
@@ -24,6 +25,7 @@ import type { NamedHours } from './stage-hours';
 })
 export class HoursTable {
   private readonly formats = inject(Formats);
+  private readonly isSmall = smallScreen();
 
   readonly caption = input.required<string>();
   readonly rows = input.required<readonly NamedHours[]>();
@@ -33,8 +35,15 @@ export class HoursTable {
 
   protected readonly idOf = (row: NamedHours) => row.id;
   protected readonly columns = computed<readonly FigureColumn<NamedHours>[]>(() => [
-    { key: 'name', heading: $localize`Work`, kind: 'text', text: ({ name }) => name },
-    ...(this.showsGrade()
+    {
+      key: 'name',
+      heading: $localize`Work`,
+      kind: 'text',
+      text: ({ name }) => name,
+      // On a phone there is no room for a column of grades.
+      ...(this.isSmall() && this.showsGrade() ? { minor: ({ grade }: NamedHours) => grade } : {}),
+    },
+    ...(this.showsGrade() && !this.isSmall()
       ? [{ key: 'grade', heading: $localize`Grade`, kind: 'text', text: (row: NamedHours) => row.grade } as const]
       : []),
     {

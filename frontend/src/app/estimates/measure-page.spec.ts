@@ -1,6 +1,8 @@
 import { type ComponentFixture, TestBed } from '@angular/core/testing';
 import { ActivatedRoute, convertToParamMap, provideRouter } from '@angular/router';
 import { BehaviorSubject, map } from 'rxjs';
+import type { MouldingShape } from '#shared/measure/moulding-shape';
+import { shapeDefaults } from '#shared/measure/shape-defaults';
 import type { Role } from '#shared/actor/role';
 import { EstimateServer, ids, workspaceOn } from '../../test/estimate-server';
 import { signIn, words } from '../../test/sign-in';
@@ -24,7 +26,8 @@ describe('MeasurePage', () => {
     );
     return found?.querySelector('input, select, textarea') as HTMLInputElement;
   };
-  const complaints = () => [...element().querySelectorAll('[role="alert"]')].map((one) => one.textContent?.trim());
+  const complaints = () =>
+    [...element().querySelectorAll('[role="alert"]')].map((one) => one.textContent?.replace(/\u00a0/g, ' ').trim());
   const button = (text: string) =>
     [...element().querySelectorAll('button')].find((one) => one.textContent?.trim() === text) as HTMLButtonElement;
 
@@ -205,6 +208,68 @@ describe('MeasurePage', () => {
     ]);
   });
 
+  it('moves a zone with Alt and the arrows, keeps the new order and takes it back', async () => {
+    await open();
+    await click('Add a zone');
+    await jest.advanceTimersByTimeAsync(3000);
+    const names = () => store.members()[0].zones.map(({ name }) => name);
+    const fields = () =>
+      [
+        ...element().querySelectorAll<HTMLInputElement>(
+          'app-zone-list input[type="text"], app-zone-list input:not([type])',
+        ),
+      ]
+        .map(({ value }) => value)
+        .filter((value) => names().includes(value));
+    expect(names()).toEqual(['All of it', 'Zone 2']);
+    const first = element().querySelector<HTMLElement>('app-zone-list .item') as HTMLElement;
+    first.dispatchEvent(new KeyboardEvent('keydown', { key: 'ArrowDown', altKey: true, bubbles: true }));
+    await settle();
+    expect([names(), fields()]).toEqual([
+      ['Zone 2', 'All of it'],
+      ['Zone 2', 'All of it'],
+    ]);
+    await jest.advanceTimersByTimeAsync(3000);
+    expect(server.member(ids.edge).zones.map(({ name }) => name)).toEqual(['Zone 2', 'All of it']);
+    store.undo();
+    await settle();
+    expect([names(), fields()]).toEqual([
+      ['All of it', 'Zone 2'],
+      ['All of it', 'Zone 2'],
+    ]);
+  });
+
+  it('says beside the sides of a plan that they cannot close it, or by how much they miss', async () => {
+    server.members = [
+      {
+        id: ids.edge,
+        version: 1,
+        content: {
+          ...server.members[0].content,
+          shape: {
+            ...(shapeDefaults('moulding') as MouldingShape),
+            plan: { form: 'polygon', sides_mm: [800, 400, 700, 400], turns_degrees: [90, 90, 90, 90], closed: true },
+          },
+        },
+      },
+    ];
+    await open();
+    const plan = () =>
+      element()
+        .querySelector('app-plan-editor')
+        ?.textContent?.replace(/\u00a0/g, ' ');
+    expect(plan()).toContain('the last side ends 100 mm away from where the first one begins');
+    const [side] = [...element().querySelectorAll<HTMLInputElement>('app-plan-editor tbody input')];
+    side.value = '1600';
+    side.dispatchEvent(new Event('input'));
+    await settle();
+    // 400 + 700 + 400 = 1500.
+    expect(plan()).toContain(
+      'The side of 1600 mm is too long to close this plan: the others come to 1500 mm together.',
+    );
+    expect(plan()).not.toContain('the last side ends');
+  });
+
   it('cuts openings out of each', async () => {
     await open();
     await click('Add an opening');
@@ -220,7 +285,9 @@ describe('MeasurePage', () => {
     await click('Measured area');
     await type('Area of one', '0.12 m²');
     const note = field('How it was measured');
-    note.dispatchEvent(new Event('blur'));
+    expect(note.value).toBe('Guessed by eye, not measured yet');
+    note.value = '';
+    note.dispatchEvent(new Event('input'));
     await settle();
     expect(complaints()).toEqual(['Please fill this in.']);
     note.value = 'foil pressed on and weighed';

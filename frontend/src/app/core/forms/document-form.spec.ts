@@ -76,7 +76,7 @@ describe('DocumentForm', () => {
   it('says what is wrong at its entry, and gives nothing out meanwhile', () => {
     open();
     form.control('shape.sides_mm.1').setValue({ text: '40000', mm: 40_000 });
-    expect(form.message('shape.sides_mm.1')).toBe('Must be at most 1000 mm.');
+    expect(form.message('shape.sides_mm.1')).toBe('Must be at most 1000\u00a0mm.');
     expect(form.message('shape.sides_mm.0')).toBe('');
     expect(form.parsed()).toBeUndefined();
     expect(form.entered()).toMatchObject({ shape: { sides_mm: [600, 40_000] } });

@@ -2,7 +2,7 @@ import { Injectable, computed, inject, signal } from '@angular/core';
 import type { MemberOrnament, Zone } from '#shared/estimates/member';
 import { type CatalogueEntry, foundEntries, ornamentCatalogue } from '../../carving';
 import { newId } from '../../core/new-id';
-import type { EditedCell, PastedCells } from '../../ui/table/figure-column';
+import type { EditedCell, MovedRow, PastedCells } from '../../ui/table/figure-column';
 import { EstimateStore } from '../estimate-store';
 import { memberForm } from '../members/member-form';
 import { MemberSelection } from '../members/member-selection';
@@ -55,6 +55,11 @@ export class MemberOrnaments {
     const index = indexOf(path);
     this.form.remove('ornaments', index);
     this.choose((this.rows().at(index) ?? this.rows().at(-1))?.use.id);
+  }
+
+  move({ rowId, from, to }: MovedRow): void {
+    this.form.move('ornaments', from, to);
+    this.choose(rowId);
   }
 
   type({ rowId, key, text }: EditedCell): void {

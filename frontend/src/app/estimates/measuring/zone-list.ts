@@ -1,5 +1,15 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
-import { MatButton } from '@angular/material/button';
+import { CdkDrag, type CdkDragDrop, CdkDragHandle, CdkDropList } from '@angular/cdk/drag-drop';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  ElementRef,
+  Injector,
+  afterNextRender,
+  computed,
+  inject,
+  input,
+} from '@angular/core';
+import { MatButton, MatIconButton } from '@angular/material/button';
 import type { Zone } from '#shared/estimates/member';
 import type { ProfileElement } from '#shared/measure/profile-element';
 import { reliefs } from '#shared/measure/relief';
@@ -15,10 +25,10 @@ import type { MemberForm } from '../members/member-form';
 import { MemberSelection } from '../members/member-selection';
 import { newZone } from './new-zone';
 
-/** The zones of a member: what of its surface each takes, and how deep its relief is. What is laid on it is chosen in Gild. */
+/** The zones of a member: what of its surface each takes, and how deep its relief is. They change places by their grip or by Alt and the arrows. What is laid on it is chosen in Gild. */
 @Component({
   selector: 'app-zone-list',
-  imports: [EntryAt, Figure, Icon, MatButton, PartPicker],
+  imports: [CdkDrag, CdkDragHandle, CdkDropList, EntryAt, Figure, Icon, MatButton, MatIconButton, PartPicker],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './zone-list.html',
   styleUrl: './item-list.scss',
@@ -27,6 +37,8 @@ export class ZoneList {
   private readonly store = inject(EstimateStore);
   private readonly selection = inject(MemberSelection);
   private readonly formats = inject(Formats);
+  private readonly injector = inject(Injector);
+  private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
 
   readonly form = input.required<MemberForm>();
   readonly isDisabled = input(false);
@@ -71,6 +83,32 @@ export class ZoneList {
 
   protected remove(index: number): void {
     this.form().remove('zones', index);
+  }
+
+  protected drop({ previousIndex, currentIndex }: CdkDragDrop<unknown>): void {
+    this.form().move('zones', previousIndex, currentIndex);
+  }
+
+  protected press(event: KeyboardEvent, index: number): void {
+    const by = { ArrowUp: -1, ArrowDown: 1 }[event.key];
+    if (!by || !event.altKey || this.isDisabled()) return;
+    event.preventDefault();
+    this.shift(index, by);
+  }
+
+  /** The entry one stands at goes along with its zone. */
+  protected shift(index: number, by: number): void {
+    const to = index + by;
+    if (to < 0 || to >= this.zones().length) return;
+    const place = this.entriesOf(index).indexOf(document.activeElement as HTMLElement);
+    this.form().move('zones', index, to);
+    const focus = () => (this.entriesOf(to).at(Math.max(0, place)) ?? this.entriesOf(to).at(0))?.focus();
+    afterNextRender(focus, { injector: this.injector });
+  }
+
+  private entriesOf(index: number): HTMLElement[] {
+    const zone = this.host.nativeElement.querySelectorAll('.item').item(index);
+    return [...zone.querySelectorAll<HTMLElement>('input, select, button')];
   }
 
   protected takeBy(path: string, way: 'share' | 'parts'): void {

@@ -10,8 +10,7 @@ import {
 } from '@angular/material/dialog';
 import { firstValueFrom } from 'rxjs';
 import type { Shape, ShapeKind } from '#shared/measure/shape';
-import { shapeDefaults } from '#shared/measure/shape-defaults';
-import { ShapeCards, shapeNames } from '../../measure';
+import { firstShape, ShapeCards, shapeNames } from '../../measure';
 
 /** Asks which shape a new member has. */
 @Component({
@@ -34,15 +33,9 @@ export class ShapeDialog {
   }
 }
 
-/** A measured area says how it is known from the beginning; what it says first asks for the rest. */
-function startOf(kind: ShapeKind): Shape {
-  const shape = shapeDefaults(kind);
-  return shape.kind === 'measured' ? { ...shape, note: $localize`How it was measured is still to be said` } : shape;
-}
-
 /** The shape somebody chooses with its name, or undefined where they would rather not. */
 export async function askForShape(injector: Injector): Promise<{ shape: Shape; name: string } | undefined> {
   const asked = injector.get(MatDialog).open<ShapeDialog, undefined, ShapeKind>(ShapeDialog, { width: '760px' });
   const kind = await firstValueFrom(asked.afterClosed());
-  return kind && { shape: startOf(kind), name: shapeNames[kind] };
+  return kind && { shape: firstShape(kind), name: shapeNames[kind] };
 }

@@ -25,6 +25,13 @@ export interface EditedCell {
   readonly text: string;
 }
 
+/** A row that is to stand elsewhere: its place now, and where it goes, counted without itself. */
+export interface MovedRow {
+  readonly rowId: string;
+  readonly from: number;
+  readonly to: number;
+}
+
 /** Rows of a spreadsheet put down at a cell: the keys they fall under, and their texts line by line. */
 export interface PastedCells {
   readonly rowId: string;

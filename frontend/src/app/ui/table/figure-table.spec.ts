@@ -2,7 +2,7 @@ import { ChangeDetectionStrategy, Component, signal } from '@angular/core';
 import { type ComponentFixture, TestBed } from '@angular/core/testing';
 import { signIn, words } from '../../../test/sign-in';
 import { Explanation } from '../figure/explanation';
-import type { EditedCell, FigureColumn, PastedCells } from './figure-column';
+import type { EditedCell, FigureColumn, MovedRow, PastedCells } from './figure-column';
 import { FigureTable } from './figure-table';
 
 interface Zone {
@@ -20,6 +20,7 @@ interface Zone {
       i18n-caption
       caption="Zones"
       selectable
+      [movable]="movable()"
       [columns]="columns"
       [rows]="rows()"
       [rowId]="rowId"
@@ -27,6 +28,7 @@ interface Zone {
       [(chosen)]="chosen"
       (edited)="edits.push($event)"
       (pasted)="pastes.push($event)"
+      (moved)="moves.push($event)"
     />
   `,
 })
@@ -49,6 +51,8 @@ class TestZones {
   readonly chosen = signal<string | undefined>(undefined);
   readonly edits: EditedCell[] = [];
   readonly pastes: PastedCells[] = [];
+  readonly movable = signal(true);
+  readonly moves: MovedRow[] = [];
 }
 
 describe('FigureTable', () => {
@@ -149,6 +153,35 @@ describe('FigureTable', () => {
       current().dispatchEvent(new KeyboardEvent('keydown', { key, bubbles: true, cancelable: true }));
     await fixture.whenStable();
     expect(fixture.componentInstance.edits).toEqual([{ rowId: 'a', key: 'name', text: 'A b' }]);
+  });
+
+  const pressWithAlt = async (key: string) => {
+    current().dispatchEvent(new KeyboardEvent('keydown', { key, altKey: true, bubbles: true, cancelable: true }));
+    await fixture.whenStable();
+  };
+
+  it('hands out a row that is to change places with Alt and the arrows, never past an end', async () => {
+    await pressWithAlt('ArrowUp');
+    await pressWithAlt('ArrowDown');
+    expect(fixture.componentInstance.moves).toEqual([{ rowId: 'a', from: 0, to: 1 }]);
+  });
+
+  it('leaves rows where they are where their order is not one’s own', async () => {
+    fixture.componentInstance.movable.set(false);
+    await fixture.whenStable();
+    await pressWithAlt('ArrowDown');
+    expect(fixture.componentInstance.moves).toEqual([]);
+    expect(element().querySelector('.grip')).toBeNull();
+  });
+
+  it('opens a grouped figure as one would type it', async () => {
+    Object.assign(fixture.componentInstance.columns[1], { editable: true, explained: undefined });
+    fixture.componentInstance.rows.set([{ id: 'a', name: 'Ovolo', leaves: '12,345.6 cm²' }]);
+    await fixture.whenStable();
+    await press('ArrowRight', 'Enter');
+    expect(editor()?.value).toBe('12345.6 cm²');
+    await press('Enter');
+    expect(fixture.componentInstance.edits).toEqual([]);
   });
 });
 

@@ -1,3 +1,4 @@
+import { CdkDrag, type CdkDragDrop, CdkDragHandle, CdkDropList } from '@angular/cdk/drag-drop';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -16,15 +17,16 @@ import { decimalSign } from '#shared/units/decimal-sign';
 import { ungrouped } from '#shared/units/ungrouped';
 import { Formats } from '../../core/formats/formats';
 import { Figure } from '../figure/figure';
-import type { EditedCell, FigureColumn, PastedCells } from './figure-column';
+import { Icon } from '../icon/icon';
+import type { EditedCell, FigureColumn, MovedRow, PastedCells } from './figure-column';
 import { ghostFractions } from './ghost-fraction';
 import { placeAfter, type GridPlace } from './grid-place';
 import { pastedLines } from './pasted-lines';
 
-/** A dense table of figures: arrow keys move, Enter or typing edits a cell, rows of a spreadsheet can be pasted at one. */
+/** A dense table of figures: arrow keys move, Enter or typing edits a cell, rows of a spreadsheet can be pasted at one; rows change places by their grip or by Alt and the arrows. */
 @Component({
   selector: 'app-figure-table',
-  imports: [Figure],
+  imports: [CdkDrag, CdkDragHandle, CdkDropList, Figure, Icon],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './figure-table.html',
   styleUrl: './figure-table.scss',
@@ -46,8 +48,11 @@ export class FigureTable<Row> {
   /** Rows can be chosen; the chosen one is tinted. */
   readonly selectable = input(false, { transform: booleanAttribute });
   readonly chosen = model<string>();
+  /** Rows can change places. */
+  readonly movable = input(false, { transform: booleanAttribute });
   readonly edited = output<EditedCell>();
   readonly pasted = output<PastedCells>();
+  readonly moved = output<MovedRow>();
 
   protected readonly place = signal<GridPlace>({ row: 0, column: 0 });
   protected readonly draft = signal<string | undefined>(undefined);
@@ -81,6 +86,7 @@ export class FigureTable<Row> {
   }
 
   protected press(event: KeyboardEvent): void {
+    if (event.altKey) this.pressWithAlt(event);
     if (event.altKey || event.metaKey) return;
     const isWritten = event.key.length === 1 && event.key !== ' ' && !event.ctrlKey;
     // The editor has opened but is not there yet: fast fingers lose nothing.
@@ -97,6 +103,27 @@ export class FigureTable<Row> {
     else return;
     event.preventDefault();
     this.focusCell();
+  }
+
+  private pressWithAlt(event: KeyboardEvent): void {
+    const by = { ArrowUp: -1, ArrowDown: 1 }[event.key];
+    const from = this.place().row;
+    if (!by || !this.movable() || this.draft() !== undefined) return;
+    event.preventDefault();
+    this.shift(from, from + by);
+    this.focusCell();
+  }
+
+  protected drop({ previousIndex, currentIndex }: CdkDragDrop<unknown>): void {
+    this.shift(previousIndex, currentIndex);
+  }
+
+  /** The cell one stands at goes along with its row. */
+  private shift(from: number, to: number): void {
+    const line = this.lines().at(from);
+    if (!line || to < 0 || to >= this.size().rows || from === to) return;
+    this.moved.emit({ rowId: line.id, from, to });
+    this.move({ ...this.place(), row: to });
   }
 
   protected pressInEditor(event: KeyboardEvent, text: string): void {
