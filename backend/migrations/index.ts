@@ -2,22 +2,26 @@ import type { Migration } from '../src/platform/database/migration';
 import { platform } from './0001-platform';
 import { accounts } from './0002-accounts';
 import { numbersAndWords } from './0003-numbers-and-words';
+import { loginAttempts } from './0004-login-attempts';
 import { rateCards } from './0010-rate-cards';
 import { cardEffects } from './0011-card-effects';
 import { jobs } from './0020-jobs';
 import { estimates } from './0030-estimates';
 import { variations } from './0031-variations';
 import { agreements } from './0040-agreements';
+import { invoices } from './0050-invoices';
 
 /** Every step of the schema, in the order in which they are taken. A step that was released is never changed. */
 export const migrations: readonly Migration[] = [
   platform,
   accounts,
   numbersAndWords,
+  loginAttempts,
   rateCards,
   cardEffects,
   jobs,
   estimates,
   variations,
   agreements,
+  invoices,
 ];

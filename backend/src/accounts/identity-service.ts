@@ -4,7 +4,7 @@ import { formatsFor } from '#shared/units/formats-for';
 import type { ValueFormats } from '#shared/words/say';
 import type { Identities, Identity, SignedIn } from '../platform/session/session-control';
 import type { AccountRepository } from './account-repository';
-import type { LoginThrottlePolicy } from './login-throttle-policy';
+import type { LoginThrottleService } from './login-throttle-service';
 import type { MembershipRepository } from './membership-repository';
 import { fitsPassword } from './password-hash';
 import type { SessionFacts } from './session-presenter';
@@ -14,7 +14,7 @@ interface Parts {
   readonly accounts: AccountRepository;
   readonly memberships: MembershipRepository;
   readonly workshops: WorkshopRepository;
-  readonly throttle: LoginThrottlePolicy;
+  readonly throttle: LoginThrottleService;
 }
 
 /** Who somebody is: at sign-in by their password, afterwards by what the session remembers. */
@@ -50,10 +50,10 @@ export class IdentityService implements Identities {
     password: string;
     address: string;
   }): Promise<Identity | undefined> {
-    this.parts.throttle.begin(email, address);
+    await this.parts.throttle.begin(email, address);
     const account = await this.parts.accounts.byEmail(email);
     if (!(await fitsPassword(password, account?.passwordHash)) || !account) return undefined;
-    this.parts.throttle.succeeded(email, address);
+    await this.parts.throttle.succeeded(email, address);
     return this.identityOf(account.id);
   }
 

@@ -9,7 +9,8 @@ import { IdentityService } from './identity-service';
 import { InvitationRepository } from './invitation-repository';
 import { InvitationService } from './invitation-service';
 import { Letters } from './letters';
-import { LoginThrottlePolicy } from './login-throttle-policy';
+import { LoginAttemptRepository } from './login-attempt-repository';
+import { LoginThrottleService } from './login-throttle-service';
 import { MailedLinkRepository } from './mailed-link-repository';
 import { MailedLinks } from './mailed-links';
 import { MembershipRepository } from './membership-repository';
@@ -23,6 +24,7 @@ import { WorkshopRepository } from './workshop-repository';
 import { workshopRoutes } from './workshop-routes';
 import { WorkshopService } from './workshop-service';
 
+export { hashOfToken, newToken } from './new-token';
 export type { WorkshopSettingsRow } from './workshop-model';
 export type { WorkshopService } from './workshop-service';
 
@@ -33,7 +35,7 @@ export interface Accounts {
   readonly people: PeopleService;
   readonly newcomers: NewcomerService;
   readonly isAnyFounded: () => Promise<boolean>;
-  readonly sweep: () => Promise<number>;
+  readonly sweep: () => Promise<void>;
   readonly routes: readonly Route[];
 }
 
@@ -51,7 +53,7 @@ function openRepositories({ database }: Platform) {
 export function openAccounts(platform: Platform, audit: Audit): Accounts {
   const repositories = openRepositories(platform);
   const { accounts, memberships, workshopRows } = repositories;
-  const throttle = new LoginThrottlePolicy(platform.clock);
+  const throttle = new LoginThrottleService(new LoginAttemptRepository(platform.database), platform.clock);
   const links = new MailedLinks(new MailedLinkRepository(platform.database), platform.clock);
   const base = {
     ...platform,
@@ -79,7 +81,7 @@ export function openAccounts(platform: Platform, audit: Audit): Accounts {
     people,
     newcomers,
     isAnyFounded: () => workshopRows.isAnyFounded(),
-    sweep: () => links.sweep(),
+    sweep: async () => void (await Promise.all([links.sweep(), throttle.sweep()])),
     routes: [
       ...sessionRoutes({ ...base, identities }),
       ...passwordRoutes({ passwords, identities }),

@@ -1,4 +1,5 @@
 import type { Config } from '../platform/config/config';
+import { ownOrigin } from '../platform/config/own-origin';
 import { words } from '../platform/http/words';
 import type { Letter } from '../platform/mail/mailbox';
 
@@ -43,7 +44,6 @@ export class Letters {
 
   /** The secret stands in the fragment, which no server and no log ever sees. */
   private link(page: keyof typeof pages, token: string): string {
-    const base = this.config.publicUrl?.origin ?? `http://127.0.0.1:${this.config.port}`;
-    return `${base}${pages[page]}#${token}`;
+    return `${ownOrigin(this.config)}${pages[page]}#${token}`;
   }
 }

@@ -3,7 +3,7 @@ import { Rejection } from '#shared/problems/rejection';
 import type { Clock } from '../platform/clock/clock';
 import type { AccountRow } from './account-model';
 import type { AccountRepository } from './account-repository';
-import type { LoginThrottlePolicy } from './login-throttle-policy';
+import type { LoginThrottleService } from './login-throttle-service';
 import { fitsPassword, hashPassword } from './password-hash';
 import { refuseWeakPassword } from './password-policy';
 
@@ -16,7 +16,7 @@ interface Newcomer {
 
 interface Parts {
   readonly accounts: AccountRepository;
-  readonly throttle: LoginThrottlePolicy;
+  readonly throttle: LoginThrottleService;
   readonly clock: Clock;
 }
 
@@ -40,9 +40,9 @@ export class NewcomerService {
   }
 
   private async recognise(known: AccountRow, { password, address }: Newcomer): Promise<AccountRow> {
-    this.parts.throttle.begin(known.email, address);
+    await this.parts.throttle.begin(known.email, address);
     if (!(await fitsPassword(password, known.passwordHash))) throw new Rejection('not-allowed', 'password-wrong');
-    this.parts.throttle.succeeded(known.email, address);
+    await this.parts.throttle.succeeded(known.email, address);
     return known;
   }
 }

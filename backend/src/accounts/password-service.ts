@@ -7,7 +7,7 @@ import type { SessionList } from '../platform/session/session-list';
 import type { Tasks } from '../platform/tasks/tasks';
 import type { AccountRepository } from './account-repository';
 import type { Letters } from './letters';
-import type { LoginThrottlePolicy } from './login-throttle-policy';
+import type { LoginThrottleService } from './login-throttle-service';
 import type { MailedLinks } from './mailed-links';
 import type { MembershipRepository } from './membership-repository';
 import { fitsPassword, hashPassword } from './password-hash';
@@ -24,7 +24,7 @@ interface Parts {
   readonly mailbox: Mailbox;
   readonly letters: Letters;
   readonly tasks: Tasks;
-  readonly throttle: LoginThrottlePolicy;
+  readonly throttle: LoginThrottleService;
   readonly clock: Clock;
   readonly log: Log;
 }
@@ -38,11 +38,11 @@ export class PasswordService {
   /** Sets a new password for somebody who knows the current one; wrong ones count like wrong sign-ins. */
   async change(person: Person, entry: { current: string; password: string; address: string }): Promise<void> {
     const { accounts, throttle } = this.parts;
-    throttle.begin(person.email, entry.address);
+    await throttle.begin(person.email, entry.address);
     const account = await accounts.get(person.accountId);
     if (!(await fitsPassword(entry.current, account.passwordHash)))
       throw new Rejection('not-allowed', 'password-wrong');
-    throttle.succeeded(person.email, entry.address);
+    await throttle.succeeded(person.email, entry.address);
     await this.set(person, entry.password);
   }
 

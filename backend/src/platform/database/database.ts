@@ -27,10 +27,14 @@ const driverOptions = {
 /** The connection pool, and the one way to run a transaction: `transaction(work)`. Repositories called within join it. */
 export class Database {
   readonly sequelize: Sequelize;
+  private besides: Database | undefined;
   /** How many statements have been sent so far; tests watch it. */
   statements = 0;
 
-  constructor(url: string, connections = 10) {
+  constructor(
+    private readonly url: string,
+    connections = 10,
+  ) {
     this.sequelize = new Sequelize(url, {
       dialect: 'mariadb',
       dialectModule: mariadb,
@@ -41,6 +45,14 @@ export class Database {
       define: { underscored: true, timestamps: false, freezeTableName: true },
     });
     repairSequelize(this.sequelize);
+  }
+
+  /**
+   * A few connections of their own for what is kept even where the step it belongs to is rolled back, so that a step that holds a
+   * connection never waits for one that other steps hold in the same way.
+   */
+  get aside(): Database {
+    return (this.besides ??= new Database(this.url, 3));
   }
 
   /** Describes a table to Sequelize, which writes the names of the columns into what it is given: so each gets a copy of its kind. */
@@ -69,7 +81,8 @@ export class Database {
     return (result as unknown as { affectedRows?: number }).affectedRows ?? 0;
   }
 
-  close(): Promise<void> {
-    return this.sequelize.close();
+  async close(): Promise<void> {
+    await this.besides?.close();
+    await this.sequelize.close();
   }
 }
