@@ -3,7 +3,13 @@ import * as people from '#shared/accounts/people-endpoints';
 import * as sessions from '#shared/accounts/session-endpoints';
 import * as workshops from '#shared/accounts/workshop-endpoints';
 import type { Endpoint } from '#shared/actor/endpoint';
+import * as accesses from '#shared/agreements/accesses-endpoints';
+import * as agreement from '#shared/agreements/agreement-endpoints';
+import * as letters from '#shared/agreements/letters-endpoints';
+import * as questions from '#shared/agreements/questions-endpoints';
 import * as history from '#shared/audit/history-endpoints';
+import * as clientIssues from '#shared/client-page/client-issues-endpoints';
+import * as clientVisits from '#shared/client-page/visits-endpoints';
 import * as estimates from '#shared/estimates/estimates-endpoints';
 import * as issues from '#shared/estimates/issues-endpoints';
 import * as clients from '#shared/jobs/clients-endpoints';
@@ -24,4 +30,10 @@ export const endpoints: readonly Endpoint[] = [
   jobs,
   estimates,
   issues,
+  accesses,
+  questions,
+  agreement,
+  letters,
+  clientVisits,
+  clientIssues,
 ].flatMap((file) => Object.values<object>(file).filter(isEndpoint));

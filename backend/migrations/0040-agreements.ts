@@ -1,6 +1,6 @@
 import { migration } from '../src/platform/database/migration';
 
-/** What a workshop and its client settle: ways in for clients, questions, decisions. */
+/** What a workshop and its client settle: ways in for clients, questions, decisions, and the words of letters. */
 export const agreements = migration('0040-agreements', [
   `CREATE TABLE IF NOT EXISTS client_accesses (
     workshop_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
@@ -18,7 +18,64 @@ export const agreements = migration('0040-agreements', [
     UNIQUE KEY accesses_by_token (token_hash),
     KEY accesses_of_job (workshop_id, job_id, id),
     KEY accesses_of_client (workshop_id, client_id, id),
-    CONSTRAINT accesses_of_client FOREIGN KEY (workshop_id, client_id) REFERENCES clients (workshop_id, id),
+    CONSTRAINT accesses_of_client FOREIGN KEY (workshop_id, client_id) REFERENCES clients (workshop_id, id) ON DELETE CASCADE,
     CONSTRAINT accesses_of_job FOREIGN KEY (workshop_id, job_id) REFERENCES jobs (workshop_id, id)
+  ) ENGINE=InnoDB`,
+  'ALTER TABLE clients ADD KEY IF NOT EXISTS clients_by_email (email)',
+  `CREATE TABLE IF NOT EXISTS questions (
+    workshop_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    job_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    issue_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    author VARCHAR(8) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    name VARCHAR(120) NOT NULL,
+    account_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NULL,
+    text TEXT NOT NULL,
+    at DATETIME(3) NOT NULL,
+    PRIMARY KEY (workshop_id, id),
+    KEY questions_of_job (workshop_id, job_id, id),
+    CONSTRAINT questions_of_job FOREIGN KEY (workshop_id, job_id) REFERENCES jobs (workshop_id, id),
+    CONSTRAINT questions_on_issue FOREIGN KEY (workshop_id, issue_id) REFERENCES issues (workshop_id, id)
+  ) ENGINE=InnoDB`,
+  `CREATE TABLE IF NOT EXISTS decisions (
+    workshop_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    issue_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    job_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    client_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    access_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NULL,
+    kind VARCHAR(8) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    typed_name VARCHAR(120) NOT NULL,
+    at DATETIME(3) NOT NULL,
+    address VARCHAR(60) NOT NULL,
+    choice JSON NOT NULL,
+    reason TEXT NOT NULL,
+    taxes JSON NOT NULL,
+    net_minor BIGINT NOT NULL,
+    tax_minor BIGINT NOT NULL,
+    gross_minor BIGINT NOT NULL,
+    pdf_sha256 VARCHAR(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    file_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NULL,
+    PRIMARY KEY (workshop_id, id),
+    UNIQUE KEY decision_on_issue (workshop_id, issue_id),
+    KEY decisions_of_job (workshop_id, job_id, id),
+    CONSTRAINT decision_on_issue FOREIGN KEY (workshop_id, issue_id) REFERENCES issues (workshop_id, id),
+    CONSTRAINT decisions_of_job FOREIGN KEY (workshop_id, job_id) REFERENCES jobs (workshop_id, id),
+    CONSTRAINT accepted_paper FOREIGN KEY (workshop_id, file_id) REFERENCES files (workshop_id, id)
+  ) ENGINE=InnoDB`,
+  `CREATE OR REPLACE TRIGGER decisions_stay BEFORE UPDATE ON decisions FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'a decision stays as it was made'`,
+  `CREATE OR REPLACE TRIGGER decisions_are_kept BEFORE DELETE ON decisions FOR EACH ROW
+    SIGNAL SQLSTATE '45000' SET MESSAGE_TEXT = 'a decision is kept'`,
+  `CREATE TABLE IF NOT EXISTS letter_templates (
+    workshop_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    kind VARCHAR(20) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+    version INT NOT NULL,
+    subject VARCHAR(200) NOT NULL,
+    text TEXT NOT NULL,
+    PRIMARY KEY (workshop_id, id),
+    UNIQUE KEY template_of_kind (workshop_id, kind),
+    CONSTRAINT templates_of_workshop FOREIGN KEY (workshop_id) REFERENCES workshops (id)
   ) ENGINE=InnoDB`,
 ]);

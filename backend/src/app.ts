@@ -1,6 +1,7 @@
 import { openAccounts, type Accounts } from './accounts';
 import { openAgreements, type Agreements } from './agreements';
 import { openAudit, type Audit } from './audit';
+import { noInvoices, openClientPage } from './client-page';
 import { PaperMaking } from './documents';
 import { openEstimates, type Estimates } from './estimates';
 import { openJobs, type Jobs } from './jobs';
@@ -44,8 +45,10 @@ export function openApp(platform: Platform, catcher?: MailCatcher): App {
     jobs,
     papers: new PaperMaking(),
   });
-  const agreements = openAgreements(platform, { jobs });
-  const routes = [...audit.routes, ...accounts.routes, ...rateCards.routes, ...jobs.routes, ...estimates.routes];
+  const agreements = openAgreements(platform, { accounts, audit, jobs, estimates });
+  const clientPage = openClientPage(platform, { accounts, estimates, agreements, invoices: noInvoices });
+  const features = [audit, accounts, rateCards, jobs, estimates, agreements, clientPage];
+  const routes = features.flatMap((feature) => feature.routes);
   const web = openWebServer(platform, {
     routes,
     identities: accounts.identities,

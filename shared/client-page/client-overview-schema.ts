@@ -1,9 +1,6 @@
 import * as z from 'zod';
+import { issueStandings } from '#shared/agreements/issue-standing';
 import { clientLetterheadSchema } from '#shared/client-page/client-letterhead-schema';
-
-/** Where an issue stands for its client: `open` may be accepted. */
-export const clientIssueStates = ['open', 'accepted', 'declined', 'replaced', 'past-validity'] as const;
-export type ClientIssueState = (typeof clientIssueStates)[number];
 
 /** An issue in a list. */
 export const clientIssueSummarySchema = z.strictObject({
@@ -12,7 +9,7 @@ export const clientIssueSummarySchema = z.strictObject({
   number: z.string(),
   letter: z.string(),
   title: z.string(),
-  state: z.enum(clientIssueStates),
+  state: z.enum(issueStandings),
   issuedOn: z.string(),
   validUntil: z.string(),
   gross_minor: z.int(),

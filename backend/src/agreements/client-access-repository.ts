@@ -20,6 +20,12 @@ export class ClientAccessRepository extends WorkshopRows<ClientAccessRow> {
     return row;
   }
 
+  /** How many letters to sign in a client was sent since. */
+  async signInsSince(workshopId: string, clientId: string, since: Date): Promise<number> {
+    const where = { clientId, purpose: 'sign-in', createdAt: { [Op.gt]: since } };
+    return (await this.list(workshopId, { where, limit: 10 })).length;
+  }
+
   /** Whose secret this is, in whatever workshop; the secret alone says so, before anybody is known. */
   async byTokenHash(tokenHash: string): Promise<ClientAccessRow | undefined> {
     const row = await this.table.findOne({ where: { tokenHash }, raw: true });

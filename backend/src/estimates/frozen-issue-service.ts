@@ -75,11 +75,9 @@ export class FrozenIssueService {
     return { ...snapshot, choice, figures };
   }
 
-  /** The client's paper: of the base the very one that was issued, of a choice one set from what was frozen. Equal choice, equal bytes. */
-  async paper({ row, snapshot }: FrozenIssue, choice: Choice): Promise<IssuedPaper> {
-    const { workshopId, id } = row;
-    if (choice.length > 0)
-      return this.parts.papers.estimatePaper(await this.chosen({ snapshot }, choice), await this.logo(workshopId));
+  /** The client's paper: of the base the very one that was issued, of a choice one set from it as chosen. Equal choice, equal bytes. */
+  async paper({ workshopId, id }: IssueRow, chosen: Snapshot): Promise<IssuedPaper> {
+    if (chosen.choice.length > 0) return this.parts.papers.estimatePaper(chosen, await this.logo(workshopId));
     const fileId = await this.parts.issues.paperFile(workshopId, id, 'estimate.pdf');
     if (!fileId) throw new Rejection('not-found', 'problem-not-found');
     return this.parts.files.read(workshopId, fileId);

@@ -1,5 +1,5 @@
 import { Op } from 'sequelize';
-import type { IssueState, Paper } from '#shared/estimates/issue-schema';
+import type { Paper } from '#shared/estimates/issue-schema';
 import type { Database } from '../platform/database/database';
 import { WorkshopRows } from '../platform/database/workshop-rows';
 import { issuePaperTable, issueTable, type IssuePaperRow, type IssueRow } from './issue-model';
@@ -45,8 +45,9 @@ export class IssueRepository {
     return this.get(workshopId, id);
   }
 
-  async markAs(workshopId: string, id: string, state: IssueState): Promise<void> {
-    await this.issues.write(workshopId, id, { state });
+  /** Another issue takes its place, unless it has been decided at this very moment. */
+  async markReplaced(workshopId: string, id: string): Promise<void> {
+    await this.issues.writeWhere(workshopId, { id, state: ['issued', 'sent'] }, { state: 'replaced' });
   }
 
   async addPaper(workshopId: string, paper: Omit<IssuePaperRow, 'workshopId'>): Promise<void> {

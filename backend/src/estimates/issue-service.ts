@@ -75,8 +75,7 @@ export class IssueService {
       { letter: issueLetter((before?.sequence ?? 0) + 1), note: request.note },
     );
     const row = await this.keep(actor, snapshot, (before?.sequence ?? 0) + 1);
-    if (before && (before.state === 'issued' || before.state === 'sent'))
-      await this.parts.issues.markAs(workshopId, before.id, 'replaced');
+    if (before) await this.parts.issues.markReplaced(workshopId, before.id);
     await this.parts.drafts.followIssue(whole.estimate, row.letter);
     const values = { letter: row.letter, number: whole.estimate.number };
     await this.parts.audit.record(actor, {

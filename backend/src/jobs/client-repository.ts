@@ -23,6 +23,12 @@ export class ClientRepository extends ListedRows<ClientRow> {
     return new Map((rows as unknown as Pick<ClientRow, 'id' | 'name'>[]).map(({ id, name }) => [id, name]));
   }
 
+  /** All who have this address, in whatever workshop: an address alone says nothing of who asks. */
+  async byEmail(email: string): Promise<ClientRow[]> {
+    const rows = await this.table.findAll({ where: { email }, order: [['id', 'ASC']], limit: 50, raw: true });
+    return rows as unknown as ClientRow[];
+  }
+
   async countJobs(workshopId: string, id: string, by: 1 | -1): Promise<void> {
     await this.table.increment('jobs', { by, where: { workshopId, id } });
   }

@@ -30,6 +30,11 @@ export class ClientService {
     return this.parts.clients.get(workshopId, id);
   }
 
+  /** Everybody who is kept under an address, in all workshops. */
+  withEmail(email: string): Promise<ClientRow[]> {
+    return this.parts.clients.byEmail(email);
+  }
+
   /** Enters a client or changes one; what was sent twice is kept once. */
   async keep(actor: Actor, seen: Seen, content: ClientContent): Promise<ClientRow> {
     const row = await this.parts.clients.find(actor.workshopId, seen.id);

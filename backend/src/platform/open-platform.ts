@@ -13,5 +13,5 @@ export function openPlatform(config: Config, clock: Clock, log: Log): Platform {
   const database = new Database(config.databaseUrl);
   const tasks = new Tasks(database, clock, log);
   const files = new FileStore(database, join(config.dataFolder, 'files'), clock);
-  return { config, clock, log, database, tasks, files, mailbox: new Mailbox(config, tasks) };
+  return { config, clock, log, database, tasks, files, mailbox: new Mailbox(config, tasks, files) };
 }

@@ -94,6 +94,16 @@ export class WorkshopRows<R extends WorkshopRow> {
     await this.table.update(change as never, { where: { workshopId, id } as WhereOptions<R> });
   }
 
+  /** Writes over whatever fits, for states that only lead one way. */
+  async writeWhere(
+    workshopId: string,
+    where: WhereOptions<R>,
+    change: Partial<Omit<R, keyof WorkshopRow>>,
+  ): Promise<void> {
+    const own = { [Op.and]: [{ workshopId }, where] } as WhereOptions<R>;
+    await this.table.update(change as never, { where: own });
+  }
+
   /** Changes the row if it still is at `version`, and raises it; else refuses as stale with the row as it stands now. */
   async change(
     workshopId: string,

@@ -2,8 +2,18 @@ import type { RequestHandler } from 'express';
 import type { CaughtMail, MailCatcher } from '../mail/mail-catcher';
 import { escaped, plainPage } from './plain-page';
 
-const shown = (mail: CaughtMail): string =>
-  `<article><h2>${escaped(mail.at)}</h2><pre>${escaped(mail.headers)}\n\n${escaped(mail.text)}</pre></article>`;
+/** Enclosed files by their names alone, and HTML as it is written: nothing that came in a mail is run here. */
+function shown({ at, headers, text, html, enclosures }: CaughtMail): string {
+  const files = enclosures.map(
+    ({ name, media, size_bytes }) => `<li>${escaped(`${name}, ${media}, ${size_bytes} bytes`)}</li>`,
+  );
+  return [
+    `<article><h2>${escaped(at)}</h2><pre>${escaped(headers)}\n\n${escaped(text)}</pre>`,
+    files.length > 0 ? `<h3>Enclosed</h3><ul>${files.join('')}</ul>` : '',
+    html === '' ? '' : `<details><summary>HTML</summary><pre>${escaped(html)}</pre></details>`,
+    '</article>',
+  ].join('');
+}
 
 /** The mails the catcher took in. Served only while it catches, and never where the server is reached from outside. */
 export const caughtMails =

@@ -1,18 +1,31 @@
-import { randomUUID } from 'node:crypto';
+import { createHash, randomUUID } from 'node:crypto';
 import { mkdir, readdir, readFile, writeFile } from 'node:fs/promises';
 import type { AddressInfo } from 'node:net';
 import { join } from 'node:path';
 import type { Readable } from 'node:stream';
 import { SMTPServer } from 'smtp-server';
+import { headAndBody, mailParts } from './mail-parts';
+
+/** A file that came with a mail. */
+export interface CaughtEnclosure {
+  readonly name: string;
+  readonly media: string;
+  readonly size_bytes: number;
+  readonly sha256: string;
+}
 
 /** A mail as it was caught. */
 export interface CaughtMail {
   readonly at: string;
   readonly headers: string;
   readonly text: string;
+  /** The HTML as it is written; empty where there is none. */
+  readonly html: string;
+  readonly enclosures: readonly CaughtEnclosure[];
 }
 
 const mostShown = 50;
+const hashOf = (bytes: Buffer): string => createHash('sha256').update(bytes).digest('hex');
 
 async function whole(stream: Readable): Promise<Buffer> {
   const parts: Buffer[] = [];
@@ -20,21 +33,17 @@ async function whole(stream: Readable): Promise<Buffer> {
   return Buffer.concat(parts);
 }
 
-const decoders: Readonly<Record<string, (body: string) => string>> = {
-  base64: (body) => Buffer.from(body, 'base64').toString('utf8'),
-  'quoted-printable': (body) => {
-    const joined = body.replace(/=\r?\n/g, '');
-    const bytes = joined.replace(/=([0-9A-F]{2})/g, (_, code: string) => String.fromCharCode(parseInt(code, 16)));
-    return Buffer.from(bytes, 'latin1').toString('utf8');
-  },
-};
-
-/** Reads the plain text of a mail of ours; a mail of several parts is shown as it came. */
+/** Reads a mail of ours, byte for byte as it came: its plain text, its HTML as it is written, and what was enclosed. */
 export function readMail(source: string, at: string): CaughtMail {
-  const [headers = '', ...rest] = source.split(/\r?\n\r?\n/);
-  const body = rest.join('\n\n');
-  const encoding = /^content-transfer-encoding:\s*(\S+)/im.exec(headers)?.[1]?.toLowerCase() ?? '';
-  return { at, headers, text: decoders[encoding]?.(body) ?? body };
+  const parts = mailParts(source);
+  const textOf = (media: string): string =>
+    parts.find((part) => part.media === media && part.name === '')?.bytes.toString('utf8').replace(/\r\n/g, '\n') ?? '';
+  const enclosures = parts
+    .filter(({ name }) => name !== '')
+    .map(({ name, media, bytes }) => ({ name, media, size_bytes: bytes.length, sha256: hashOf(bytes) }));
+  const [head] = headAndBody(source);
+  const headers = Buffer.from(head, 'latin1').toString('utf8');
+  return { at, headers, text: textOf('text/plain'), html: textOf('text/html'), enclosures };
 }
 
 /** Takes in every mail on a port of loopback and keeps it in a folder, for machines that have no mail server. Nothing leaves. */
@@ -75,7 +84,7 @@ export class MailCatcher {
     return Promise.all(
       names
         .slice(0, mostShown)
-        .map(async (name) => readMail(await readFile(join(this.folder, name), 'utf8'), name.slice(0, 24))),
+        .map(async (name) => readMail(await readFile(join(this.folder, name), 'latin1'), name.slice(0, 24))),
     );
   }
 

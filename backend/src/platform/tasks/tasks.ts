@@ -21,6 +21,17 @@ export interface NewTask {
   readonly runAfter?: Date;
 }
 
+/** A task that was given up. */
+export interface FailedTask {
+  readonly id: string;
+  readonly kind: string;
+  readonly content: unknown;
+  readonly attempts: number;
+  readonly createdAt: Date;
+  readonly failedAt: Date;
+  readonly lastError: string;
+}
+
 export type TaskHandler<Content> = (content: Content, task: Task<Content>) => Promise<void>;
 
 const mostAttempts = 12;
@@ -96,6 +107,25 @@ export class Tasks {
     return this.database.select(
       'SELECT id, kind, last_error AS lastError FROM tasks WHERE failed_at IS NOT NULL ORDER BY id LIMIT 1000',
     );
+  }
+
+  /** The tasks of one kind of a workshop that were given up, the newest first, at most 200. */
+  failedOf(workshopId: string, kind: string): Promise<FailedTask[]> {
+    return this.database.select<FailedTask>(
+      `SELECT id, kind, content, attempts, created_at AS createdAt, failed_at AS failedAt, last_error AS lastError FROM tasks
+       WHERE failed_at IS NOT NULL AND workshop_id = :workshopId AND kind = :kind ORDER BY id DESC LIMIT 200`,
+      { workshopId, kind },
+    );
+  }
+
+  /** Takes up again what was given up, with all its attempts before it; answers whether there was such a task. */
+  async again(task: { workshopId: string; kind: string; id: string }): Promise<boolean> {
+    const taken = await this.database.execute(
+      `UPDATE tasks SET failed_at = NULL, attempts = 0, run_after = :now
+       WHERE id = :id AND workshop_id = :workshopId AND kind = :kind AND failed_at IS NOT NULL`,
+      { ...task, now: this.clock.now() },
+    );
+    return taken > 0;
   }
 
   private async runOne(): Promise<boolean> {

@@ -1,0 +1,28 @@
+import {
+  keepLetterTemplate,
+  listGivenUpLetters,
+  listLetterTemplates,
+  previewLetter,
+  resetLetterTemplate,
+  sendLetterAgain,
+} from '#shared/agreements/letters-endpoints';
+import { mount, type Route } from '../platform/http/mount';
+import { presentGivenUp } from './agreement-presenter';
+import type { LetterService } from './letter-service';
+import type { LetterTemplateService } from './letter-template-service';
+
+export const letterRoutes = (letters: LetterService, templates: LetterTemplateService): Route[] => [
+  mount(listLetterTemplates, async ({ actor }) => ({ items: await templates.all(actor.workshopId) })),
+  mount(
+    keepLetterTemplate,
+    ({ actor, params, version, body }) => templates.keep(actor, { ...params, version }, body),
+    templates.present,
+  ),
+  mount(resetLetterTemplate, ({ actor, params }) => templates.reset(actor, params.kind)),
+  mount(previewLetter, ({ actor, params, body }) => letters.preview(actor.workshopId, params.kind, body)),
+  mount(listGivenUpLetters, async ({ actor }) => {
+    const given = await letters.givenUp(actor.workshopId);
+    return { items: given.map(presentGivenUp) };
+  }),
+  mount(sendLetterAgain, ({ actor, params }) => letters.sendAgain(actor.workshopId, params.letterId)),
+];

@@ -1,0 +1,93 @@
+import type { ClientActor } from '#shared/actor/client-actor';
+import type { ClientIssue } from '#shared/client-page/client-issue-schema';
+import type { ClientOverview } from '#shared/client-page/client-overview-schema';
+import { calculatorVersion } from '#shared/estimates/calculator-version';
+import type { Choice } from '#shared/estimates/draft';
+import type { Figures } from '#shared/estimates/figures';
+import { Rejection } from '#shared/problems/rejection';
+import type { Accounts } from '../accounts';
+import type { Agreements, ClientIssueRows } from '../agreements';
+import type { Estimates } from '../estimates';
+import { jobNumber, type NamedJobRow } from '../jobs';
+import { FileAnswer } from '../platform/http/answer';
+import type { ClientInvoices } from './client-invoices';
+import { presentClientIssue, presentClientSummary } from './client-issue-presenter';
+import { presentLetterhead } from './client-letterhead-presenter';
+
+interface Parts {
+  readonly accounts: Pick<Accounts, 'workshops'>;
+  readonly agreements: Pick<Agreements, 'scope' | 'choices' | 'decisions' | 'papers' | 'questions'>;
+  readonly estimates: Pick<Estimates, 'frozen'>;
+  readonly invoices: ClientInvoices;
+}
+
+/** What a client reads: all that is theirs, one issue, its papers. */
+export class ClientPageService {
+  constructor(private readonly parts: Parts) {}
+
+  async overview(client: ClientActor): Promise<ClientOverview> {
+    const workshop = await this.parts.accounts.workshops.get(client.workshopId);
+    const jobs = await this.parts.agreements.scope.jobs(client);
+    const at = { today: await this.today(client), timeZone: workshop.timeZone };
+    return {
+      letterhead: presentLetterhead(workshop),
+      client: { name: client.name },
+      jobs: await Promise.all(jobs.map((job) => this.jobOf(client, job, at))),
+      invoices: [...(await this.parts.invoices.of(client))],
+    };
+  }
+
+  async logo({ workshopId }: ClientActor): Promise<FileAnswer> {
+    const { bytes, name, media } = await this.parts.accounts.workshops.logo(workshopId);
+    return new FileAnswer(bytes, { name, media, shownInPage: true });
+  }
+
+  async issue(client: ClientActor, issueId: string): Promise<ClientIssue> {
+    const { scope, decisions, questions } = this.parts.agreements;
+    const issue = await scope.issue(client, issueId);
+    const { workshopId } = client;
+    return presentClientIssue({
+      issue,
+      workshop: await this.parts.accounts.workshops.get(workshopId),
+      all: await scope.allOf(workshopId, issue.job.id),
+      decision: await decisions.onIssue(workshopId, issueId),
+      questions: await questions.ofJob(workshopId, issue.job.id),
+      alternatives: await this.alternatives(issue),
+      mayChoose: issue.snapshot.calculatorVersion === calculatorVersion,
+      today: await this.today(client),
+    });
+  }
+
+  /** The accepted paper where there is one and nothing else is asked for, else the one of the choice. */
+  async paper(client: ClientActor, issueId: string, choice: Choice): Promise<FileAnswer> {
+    const { scope, decisions, papers, choices } = this.parts.agreements;
+    const issue = await scope.issue(client, issueId);
+    const decision = await decisions.onIssue(client.workshopId, issueId);
+    if (decision?.kind === 'accepted' && choice.length === 0) return papers.of(decision);
+    const { paper } = await choices.reviewed(issue, choice);
+    return new FileAnswer(paper.bytes, { name: paper.name, media: paper.media });
+  }
+
+  private today({ workshopId }: ClientActor): Promise<string> {
+    return this.parts.agreements.decisions.today(workshopId);
+  }
+
+  private async jobOf(client: ClientActor, job: NamedJobRow, at: { today: string; timeZone: string }) {
+    const issues = await this.parts.agreements.scope.allOf(client.workshopId, job.id);
+    const shown = issues.map((issue) => presentClientSummary(issue, at));
+    return { id: job.id, number: jobNumber(job), title: job.title, issues: shown };
+  }
+
+  /** Each alternative worked by itself from what was frozen; one that cannot be taken alone is shown without its strips. */
+  private async alternatives(issue: ClientIssueRows): Promise<Map<string, Figures>> {
+    const worked = new Map<string, Figures>();
+    for (const { id } of issue.snapshot.draft.settings.alternatives) {
+      const chosen = await this.parts.estimates.frozen.chosen(issue, [id]).catch((error: unknown) => {
+        if (error instanceof Rejection && error.kind === 'conflict') return undefined;
+        throw error;
+      });
+      if (chosen) worked.set(id, chosen.figures);
+    }
+    return worked;
+  }
+}

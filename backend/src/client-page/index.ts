@@ -1,0 +1,31 @@
+import type { Accounts } from '../accounts';
+import type { Agreements } from '../agreements';
+import type { Estimates } from '../estimates';
+import type { Route } from '../platform/http/mount';
+import type { Platform } from '../platform/platform';
+import type { ClientInvoices } from './client-invoices';
+import { clientPageRoutes } from './client-page-routes';
+import { ClientPageService } from './client-page-service';
+import { GuessLimit } from './guess-limit';
+import { visitRoutes } from './visit-routes';
+
+export { noInvoices, type ClientInvoices } from './client-invoices';
+
+export interface ClientPage {
+  readonly routes: readonly Route[];
+}
+
+/** What this feature stands on. */
+export interface ClientPageNeeds {
+  readonly accounts: Accounts;
+  readonly estimates: Estimates;
+  readonly agreements: Agreements;
+  readonly invoices: ClientInvoices;
+}
+
+/** Everything a client may call. */
+export function openClientPage({ clock }: Platform, needs: ClientPageNeeds): ClientPage {
+  const pages = new ClientPageService(needs);
+  const { agreements } = needs;
+  return { routes: [...visitRoutes(agreements, new GuessLimit(clock)), ...clientPageRoutes(pages, agreements)] };
+}
