@@ -15,6 +15,7 @@ import { measure } from '#shared/words/en/measure';
 import { money } from '#shared/words/en/money';
 import { problems } from '#shared/words/en/problems';
 import { programmeBoard } from '#shared/words/en/programme-board';
+import { programmePlan } from '#shared/words/en/programme-plan';
 import { rateCards } from '#shared/words/en/rate-cards';
 import { units } from '#shared/words/en/units';
 
@@ -38,6 +39,7 @@ export const en = {
   ...jobs,
   ...estimates,
   ...programmeBoard,
+  ...programmePlan,
   ...documents,
   ...agreements,
   ...clientPage,

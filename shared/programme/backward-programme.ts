@@ -1,0 +1,75 @@
+import { serialResult } from '#shared/programme/block-order';
+import { described, noPlan } from '#shared/programme/described-programme';
+import { earliestTimes } from '#shared/programme/earliest-times';
+import { improvedPlan, networkPlan, type NetworkPlan } from '#shared/programme/improved-plan';
+import { mirroredNetwork } from '#shared/programme/mirrored-network';
+import { networkBound } from '#shared/programme/network-bound';
+import { planBreaches } from '#shared/programme/plan-breaches';
+import type { Programme } from '#shared/programme/programme-plan';
+import type { ProgrammeSearch } from '#shared/programme/programme-request';
+import type { RequestNetwork } from '#shared/programme/request-network';
+import { taskBlocks } from '#shared/programme/task-blocks';
+import type { Position } from '#shared/programme/task-network';
+
+/** Positions of the backward view seen forward again, each with the crew of the same place in the list. */
+function seenForward(
+  { network }: RequestNetwork,
+  mirror: RequestNetwork['network'],
+  positions: readonly Position[],
+): Position[] {
+  return positions.map(({ start, end, crew }, task) => {
+    const { anchor, crews } = network.tasks[task];
+    const place = mirror.tasks[task].crews.indexOf(crew);
+    return anchor ?? { start: -end, end: -start, busyFrom: -end, crew: crews[place] };
+  });
+}
+
+/** Everything as late as it still ends by a moment; null where that would have to begin before it may. */
+function latestPlan(
+  ready: RequestNetwork,
+  wanted: { readonly finish: number; readonly search: ProgrammeSearch },
+): { plan: NetworkPlan; plans: number } | null {
+  const network = mirroredNetwork(ready.network, wanted.finish);
+  const earliest = earliestTimes(network);
+  if (earliest.failed) return null;
+  const blocked = { network, blocks: taskBlocks(network, earliest.starts) };
+  const { positions } = serialResult(
+    blocked,
+    ready.earliest.ends.map((end) => -end),
+  );
+  if (!positions) return null;
+  const first = networkPlan(positions);
+  const bound = networkBound(network, earliest, first.finish);
+  const { search } = wanted;
+  const improving = { first, bound, limit: search.limit ?? {}, seed: search.seed ?? 1, onBetter: () => undefined };
+  const { plan, plans } = improvedPlan(blocked, improving);
+  return { plan: networkPlan(seenForward(ready, network, plan.positions)), plans };
+}
+
+/**
+ * The plan that begins as late as it still ends by the moment wanted; where beginning at once is needed it is a plan as early as can be, and where even that
+ * ends later it is refused with how much later. Minutes.
+ */
+export function backwardProgramme(ready: RequestNetwork, first: NetworkPlan, search: ProgrammeSearch): Programme {
+  const finish = search.backwardFrom_minutes ?? first.finish;
+  const bound = networkBound(ready.network, ready.earliest, first.finish);
+  const late = latestPlan(ready, { finish, search });
+  if (late && planBreaches(ready.network, late.plan.positions).length === 0)
+    return described(ready, late.plan, { bound, plans: late.plans });
+  const improving = {
+    first,
+    bound: Math.max(bound, Math.min(finish, first.finish)),
+    limit: search.limit ?? {},
+    seed: search.seed ?? 1,
+    onBetter: () => undefined,
+  };
+  const { plan, plans } = improvedPlan({ network: ready.network, blocks: ready.blocks }, improving);
+  if (plan.finish <= finish) return described(ready, plan, { bound, plans });
+  const values = { late_minutes: plan.finish - finish };
+  const status = bound > finish ? 'infeasible' : 'unproven';
+  return {
+    ...noPlan(ready.request, status, [{ kind: 'refuse', code: 'programme-too-late', values }]),
+    lowerBound_minutes: bound,
+    plans,
+  };
+}

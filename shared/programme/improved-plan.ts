@@ -1,0 +1,89 @@
+import { seededGenerator, type Generator32 } from '#shared/estimates/risk/seeded-generator';
+import { serialResult, type BlockedNetwork } from '#shared/programme/block-order';
+import { mirroredNetwork } from '#shared/programme/mirrored-network';
+import type { SearchLimit } from '#shared/programme/project';
+import { taskBlocks } from '#shared/programme/task-blocks';
+import { earliestTimes } from '#shared/programme/earliest-times';
+import type { Position } from '#shared/programme/task-network';
+
+/** A plan in places of a network, with the moment all of it is done. */
+export interface NetworkPlan {
+  readonly positions: readonly Position[];
+  readonly finish: number;
+}
+
+/** A plan of its positions. */
+export const networkPlan = (positions: readonly Position[]): NetworkPlan => ({
+  positions,
+  finish: positions.reduce((finish, { end }) => Math.max(finish, end), -Infinity),
+});
+
+/** What improving is given: where to begin, when there is nothing more to gain, when to stop, and whom to tell. */
+export interface Improving {
+  readonly first: NetworkPlan;
+  readonly bound: number;
+  readonly limit: SearchLimit;
+  readonly seed: number;
+  readonly onBetter: (plan: NetworkPlan) => void;
+}
+
+/** Tries without a limit of the asker's. */
+const usualTries = 60;
+
+/** Sum of all ends: of two plans that finish together the one with less lying about is better. */
+const lateness = ({ positions }: NetworkPlan): number => positions.reduce((sum, { end }) => sum + end, 0);
+
+const isBetter = (one: NetworkPlan, other: NetworkPlan): boolean =>
+  one.finish < other.finish || (one.finish === other.finish && lateness(one) < lateness(other));
+
+/** The order in which a plan stands when everything is put off as far as its finish allows (double justification of Valls, Ballestín, Quintanilla 2005, from memory). */
+function justified({ network }: BlockedNetwork, plan: NetworkPlan): readonly number[] | null {
+  const mirror = mirroredNetwork(network, plan.finish);
+  const earliest = earliestTimes(mirror);
+  const blocks = taskBlocks(mirror, earliest.starts);
+  const back = serialResult(
+    { network: mirror, blocks },
+    plan.positions.map(({ end }) => -end),
+  );
+  return back.positions && back.positions.map(({ end }) => -end);
+}
+
+function shaken(plan: NetworkPlan, share: number, next: Generator32): number[] {
+  const [first, span] = [Math.min(...plan.positions.map(({ start }) => start)), plan.finish];
+  const spread = Math.max(1, span - first) * share;
+  return plan.positions.map(({ start }) => start + (spread * next()) / 2 ** 32);
+}
+
+/** How far priorities are shaken, in parts of the whole time, one try after another. */
+const shares = [0.02, 0.05, 0.1, 0.01, 0.2];
+
+/**
+ * Better and better plans: each is justified to the right and planned again, or its order is shaken by a seed; until the bound is reached or the limit says
+ * so. The number of plans tried and the best.
+ */
+export function improvedPlan(
+  blocked: BlockedNetwork,
+  improving: Improving,
+): { readonly plan: NetworkPlan; readonly plans: number } {
+  const { bound, limit, onBetter } = improving;
+  const next = seededGenerator(improving.seed);
+  const most = limit.nodes ?? (limit.shouldStop ? Infinity : usualTries);
+  let best = improving.first;
+  let current = best;
+  let plans = 0;
+  let isSettled = false;
+  while (best.finish > bound && plans < most && !limit.shouldStop?.()) {
+    plans += 1;
+    const order = isSettled ? null : justified(blocked, current);
+    const { positions } = serialResult(blocked, order ?? shaken(best, shares[plans % shares.length], next));
+    isSettled = !positions;
+    if (!positions) continue;
+    const plan = networkPlan(positions);
+    isSettled = order !== null && !isBetter(plan, current);
+    current = plan;
+    if (!isBetter(plan, best)) continue;
+    if (plan.finish < best.finish) onBetter(plan);
+    best = plan;
+  }
+  return { plan: best, plans };
+}

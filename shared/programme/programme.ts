@@ -1,0 +1,106 @@
+import { continuousProject, positionsOfStarts } from '#shared/programme/continuous-project';
+import { backwardProgramme } from '#shared/programme/backward-programme';
+import { serialResult } from '#shared/programme/block-order';
+import { improvedPlan, networkPlan, type NetworkPlan } from '#shared/programme/improved-plan';
+import { networkBound } from '#shared/programme/network-bound';
+import { daysUntil, networkOf } from '#shared/programme/network-of';
+import { planBreaches } from '#shared/programme/plan-breaches';
+import { programmeContradiction } from '#shared/programme/programme-contradiction';
+import { failureFinding, requestRefusals } from '#shared/programme/programme-failure';
+import type { Programme } from '#shared/programme/programme-plan';
+import type { ProgrammeRequest, ProgrammeSearch } from '#shared/programme/programme-request';
+import { projectSchedule } from '#shared/programme/project-schedule';
+import { described, noPlan } from '#shared/programme/described-programme';
+import { firstResult, latestFirst, type RequestNetwork } from '#shared/programme/request-network';
+import { positionsOf, standingPositions } from '#shared/programme/standing-positions';
+import type { Position } from '#shared/programme/task-network';
+
+/** A plan known already, where it still keeps every rule. */
+function keptPlan(ready: RequestNetwork, plan: Programme | undefined): NetworkPlan | null {
+  if (!plan) return null;
+  const positions = positionsOf(ready, plan);
+  return planBreaches(ready.network, positions).length === 0 ? networkPlan(positions as Position[]) : null;
+}
+
+/** The earlier plan with what has to move found new places; null where none are found round what stands. */
+function replanned(ready: RequestNetwork, previous: Programme): NetworkPlan | null {
+  const standing = standingPositions(ready, previous);
+  const people = new Map(previous.tasks.map(({ taskId, personIds }) => [taskId, personIds]));
+  const preferred = ready.request.tasks.map(
+    ({ id }) => people.get(id)?.map((one) => ready.request.people.findIndex((person) => person.id === one)) ?? null,
+  );
+  const { positions } = serialResult(ready, latestFirst(ready), { standing, preferred });
+  return positions && planBreaches(ready.network, positions).length === 0 ? networkPlan(positions) : null;
+}
+
+/** The proven best where the request is the published problem, or what came of it before the limit; null where it is another. */
+function exactProgramme(ready: RequestNetwork, first: NetworkPlan | null, search: ProgrammeSearch): Programme | null {
+  const { request, network } = ready;
+  const project = continuousProject(request, network);
+  if (!project) return null;
+  const from_minutes = request.start_minutes;
+  const incumbent = first?.positions.map(({ start }) => start - from_minutes);
+  const limit = { nodes: usualNodes, ...search.limit };
+  const { starts, status, lowerBound, nodes } = projectSchedule(project, { limit, incumbent });
+  if (status === 'infeasible') {
+    const about = request.tasks[0]?.id;
+    return noPlan(request, status, [{ kind: 'refuse', code: 'programme-impossible', values: {}, about }]);
+  }
+  const positions = starts && positionsOfStarts(network, project, { starts, from_minutes });
+  return positions && described(ready, networkPlan(positions), { bound: from_minutes + lowerBound, plans: nodes });
+}
+
+/** Nodes of the search that proves the best, where nobody sets a limit. */
+const usualNodes = 20_000;
+
+const better = (one: NetworkPlan | null, other: NetworkPlan | null): NetworkPlan | null =>
+  one && other ? (other.finish < one.finish ? other : one) : (one ?? other);
+
+function planned(ready: RequestNetwork, first: NetworkPlan, search: ProgrammeSearch): Programme {
+  const kept = keptPlan(ready, search.incumbent);
+  const stable = search.previous ? replanned(ready, search.previous) : null;
+  const start = better(kept, stable ?? first) ?? first;
+  const bound = networkBound(ready.network, ready.earliest, start.finish);
+  if (stable) return described(ready, start, { bound, plans: 1 });
+  const onBetter = (plan: NetworkPlan): void => search.onBetter?.(described(ready, plan, { bound, plans: 0 }));
+  onBetter(start);
+  const improving = { first: start, bound, limit: search.limit ?? {}, seed: search.seed ?? 1, onBetter };
+  const { plan, plans } = improvedPlan(ready, improving);
+  return described(ready, plan, { bound, plans });
+}
+
+/** What stops a request before anything is planned. */
+function refusal(request: ProgrammeRequest, until_minutes: number): Programme | null {
+  const { network } = networkOf(request, daysUntil(request, until_minutes));
+  const refusals = requestRefusals(request, network);
+  if (refusals.length > 0) return noPlan(request, 'infeasible', refusals);
+  const contradiction = programmeContradiction(request, network);
+  return contradiction && { ...noPlan(request, 'infeasible', [contradiction.finding]), cycle: contradiction.lagIds };
+}
+
+const isForward = ({ previous, backwardFrom_minutes }: ProgrammeSearch): boolean =>
+  !previous && backwardFrom_minutes === undefined;
+
+/**
+ * The dated plan of a request: every task in its calendar with its people, every lag and window kept, finishing as soon as is found (or everything as late as
+ * it still ends by `backwardFrom_minutes`). Same request and search, same plan, as long as the limit counts plans. Minutes from the start of the calendar's
+ * first day; RangeError where the request names what it does not have.
+ */
+export function programme(request: ProgrammeRequest, search: ProgrammeSearch = {}): Programme {
+  if (request.tasks.length === 0)
+    return { ...noPlan(request, 'optimal', []), finish_minutes: request.start_minutes, gap: 0 };
+  const until_minutes = Math.max(request.start_minutes, search.backwardFrom_minutes ?? 0);
+  const refused = refusal(request, until_minutes);
+  if (refused) return refused;
+  const found = firstResult(request, until_minutes);
+  const { ready, result } = found;
+  const first = result.positions && networkPlan(result.positions);
+  const exact = isForward(search)
+    ? exactProgramme(ready, better(first, keptPlan(ready, search.incumbent)), search)
+    : null;
+  if (exact) return exact;
+  if (!first) return noPlan(request, found.endless ? 'infeasible' : 'unproven', [failureFinding(request, found)]);
+  return search.backwardFrom_minutes === undefined
+    ? planned(ready, first, search)
+    : backwardProgramme(ready, first, search);
+}

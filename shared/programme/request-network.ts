@@ -1,0 +1,65 @@
+import { serialResult, type BlockedNetwork, type SerialResult } from '#shared/programme/block-order';
+import { earliestTimes, type EarliestTimes } from '#shared/programme/earliest-times';
+import { mirroredNetwork } from '#shared/programme/mirrored-network';
+import { daysUntil, networkOf } from '#shared/programme/network-of';
+import type { ProgrammeRequest } from '#shared/programme/programme-request';
+import { taskBlocks } from '#shared/programme/task-blocks';
+import type { NetworkArc, TaskNetwork } from '#shared/programme/task-network';
+
+/** A request ready to be planned, with its earliest times by lags and calendars alone. */
+export interface RequestNetwork extends BlockedNetwork {
+  readonly request: ProgrammeRequest;
+  readonly earliest: EarliestTimes;
+}
+
+/** No plan of a workshop reaches further than some thirty years. */
+const mostDays = 12_000;
+
+const blocked = (network: TaskNetwork, earliest: EarliestTimes): BlockedNetwork => ({
+  network,
+  blocks: taskBlocks(network, earliest.starts),
+});
+
+/** A request over so many days of its calendar. */
+function over(request: ProgrammeRequest, days: number): RequestNetwork {
+  const { network } = networkOf(request, days);
+  const earliest = earliestTimes(network);
+  return { request, earliest, ...blocked(network, earliest) };
+}
+
+/** How early blocks should have their turn: by the latest starts at which a job as long as its lags still ends in time. */
+export function latestFirst({ network, earliest }: RequestNetwork): number[] {
+  const finish = Math.max(0, ...earliest.ends);
+  return earliestTimes(mirroredNetwork(network, finish)).ends.map((end) => -end);
+}
+
+/** The first plan of a request, or why there is none. */
+export interface FirstResult {
+  readonly ready: RequestNetwork;
+  readonly result: SerialResult;
+  /** The lag that leads beyond all hours there are, whoever else needs them. */
+  readonly endless: NetworkArc | null;
+}
+
+function firstOver(ready: RequestNetwork): FirstResult {
+  if (ready.earliest.failed) {
+    const { failed } = ready.earliest;
+    return { ready, endless: failed, result: { positions: null, failure: { task: failed.to, arc: failed } } };
+  }
+  const orders = [latestFirst(ready), ready.earliest.starts, ready.earliest.ends];
+  let result = serialResult(ready, orders[0]);
+  for (const order of orders.slice(1)) if (!result.positions) result = serialResult(ready, order);
+  return { ready, result, endless: null };
+}
+
+/** A first plan over as many days of the calendar as it takes: twice as many each time the hours run out. */
+export function firstResult(request: ProgrammeRequest, until_minutes: number): FirstResult {
+  let days = daysUntil(request, until_minutes);
+  for (;;) {
+    const found = firstOver(over(request, days));
+    const { failure } = found.result;
+    const isOutOfHours = failure !== null && (failure.arc === null || found.ready.earliest.ends.includes(Infinity));
+    if (!isOutOfHours || days * 2 > mostDays) return found;
+    days *= 2;
+  }
+}

@@ -1,0 +1,30 @@
+export const programmePlan = {
+  'programme-waits-dry': 'Waiting for {task} until {until}{sameDay, select, yes {} other { on {day}}}.',
+  'programme-waits-task': 'Waiting for {task} to be done, at {until}{sameDay, select, yes {} other { on {day}}}.',
+  'programme-waits-approval':
+    'Waiting for an approval, {approval}, until {until}{sameDay, select, yes {} other { on {day}}}.',
+  'programme-waits-release': 'Not to be begun before {until}{sameDay, select, yes {} other { on {day}}}.',
+  'programme-waits-pinned': 'Pinned to {until}{sameDay, select, yes {} other { on {day}}}.',
+  'programme-waits-people': 'Hands are at {task} until {until}{sameDay, select, yes {} other { on {day}}}.',
+  'programme-waits-place': 'Waiting for room, {place}, until {until}{sameDay, select, yes {} other { on {day}}}.',
+  'programme-waits-hours': 'Waiting for working hours at {until}{sameDay, select, yes {} other { on {day}}}.',
+  'programme-waits-window':
+    'Put off to {until}{sameDay, select, yes {} other { on {day}}}, so that {task} falls inside its time.',
+  'programme-contradiction':
+    'These steps contradict each other whatever the hours: {tasks}. Together they ask for {over_minutes} more than they allow.',
+  'programme-no-time':
+    'No time to begin {task} was found at which {next} keeps its time and falls into working hours too.',
+  'programme-no-hours':
+    'No hours were found in which {task} can be done{isBreakable, select, yes {} other { on one day}}.',
+  'programme-too-few': 'Nobody, or too few, can do {task}.',
+  'programme-impossible': 'With the people and places there are, these lags cannot all be kept.',
+  'programme-pin-closed': '{task} is pinned to a time at which nobody can begin it.',
+  'programme-pin-clash': '{task} is pinned too early for what has to come before it.',
+  'programme-too-late': 'This cannot be done by then: begun at once it is done {late_minutes} later.',
+  'programme-breach-hours': '{task} falls outside the hours of those who do it.',
+  'programme-breach-release': '{task} begins before it may.',
+  'programme-breach-least': '{task} comes too early after {other}: not before {until} on {day}.',
+  'programme-breach-most': '{other} comes too late after {task}: its time is over by then.',
+  'programme-breach-people': '{task} and {other} ask for the same hands at the same time.',
+  'programme-breach-place': 'There is no room for {task}: {place}.',
+} as const;
