@@ -27,7 +27,7 @@ import type { MemberForm } from '../members/member-form';
       grid-column: span 2;
     }
 
-    @media (min-width: 900px) {
+    @media (min-width: 1200px) {
       .particulars {
         grid-template-columns: minmax(0, 2.2fr) minmax(0, 1fr) minmax(0, 1.5fr) minmax(0, 1.5fr);
       }

@@ -32,6 +32,7 @@ import { newZone } from './new-zone';
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './zone-list.html',
   styleUrl: './item-list.scss',
+  host: { '(keydown)': 'press($event)' },
 })
 export class ZoneList {
   private readonly store = inject(EstimateStore);
@@ -89,9 +90,10 @@ export class ZoneList {
     this.form().move('zones', previousIndex, currentIndex);
   }
 
-  protected press(event: KeyboardEvent, index: number): void {
+  protected press(event: KeyboardEvent): void {
     const by = { ArrowUp: -1, ArrowDown: 1 }[event.key];
-    if (!by || !event.altKey || this.isDisabled()) return;
+    const index = this.items().indexOf((event.target as HTMLElement).closest('.item') as HTMLElement);
+    if (!by || !event.altKey || index < 0 || this.isDisabled()) return;
     event.preventDefault();
     this.shift(index, by);
   }
@@ -107,8 +109,11 @@ export class ZoneList {
   }
 
   private entriesOf(index: number): HTMLElement[] {
-    const zone = this.host.nativeElement.querySelectorAll('.item').item(index);
-    return [...zone.querySelectorAll<HTMLElement>('input, select, button')];
+    return [...this.items()[index].querySelectorAll<HTMLElement>('input, select, button')];
+  }
+
+  private items(): HTMLElement[] {
+    return [...this.host.nativeElement.querySelectorAll<HTMLElement>('.item')];
   }
 
   protected takeBy(path: string, way: 'share' | 'parts'): void {

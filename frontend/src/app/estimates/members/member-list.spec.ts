@@ -2,12 +2,14 @@ import { type ComponentFixture, TestBed } from '@angular/core/testing';
 import { MatDialog } from '@angular/material/dialog';
 import { ActivatedRoute, convertToParamMap, provideRouter } from '@angular/router';
 import { of } from 'rxjs';
+import { shapeDefaults } from '#shared/measure/shape-defaults';
 import type { Role } from '#shared/actor/role';
 import { EstimateServer, ids, workspaceOn } from '../../../test/estimate-server';
 import { signIn, words } from '../../../test/sign-in';
 import { Notices } from '../../core/problems/notices';
 import { EstimateStore } from '../estimate-store';
 import { MemberList } from './member-list';
+import { newMember } from './new-member';
 
 describe('MemberList', () => {
   let server: EstimateServer;
@@ -117,6 +119,29 @@ describe('MemberList', () => {
       'lime',
       ids.piece,
     ]);
+  });
+
+  it('adds a member for every pasted row, however many there were, in one step that can be taken back', async () => {
+    await open();
+    const contents = ['Frieze', 'Rail', 'Stile'].map((name, index) =>
+      newMember({ pieceId: ids.piece, timberId: 'lime', place: 9000 + index, name, shape: shapeDefaults('rectangle') }),
+    );
+    jest.spyOn(TestBed.inject(MatDialog), 'open').mockReturnValue({ afterClosed: () => of(contents) } as never);
+    (element().querySelector('.head button') as HTMLButtonElement).click();
+    await settle();
+    const paste = [...document.querySelectorAll<HTMLButtonElement>('.mat-mdc-menu-panel button')].find((one) =>
+      one.textContent?.includes('Paste rows of a spreadsheet'),
+    );
+    paste?.click();
+    await settle();
+    await settle();
+    expect(text('.name')).toEqual(['Top edge', 'Leg', 'Frieze', 'Rail', 'Stile']);
+    await jest.advanceTimersByTimeAsync(700);
+    expect(server.members.map(({ content }) => content.name)).toEqual(['Top edge', 'Leg', 'Frieze', 'Rail', 'Stile']);
+    expect(server.arrived).toHaveLength(1);
+    store.undo();
+    await settle();
+    expect(text('.name')).toEqual(['Top edge', 'Leg']);
   });
 
   it('begins an empty estimate with a piece', async () => {
