@@ -23,7 +23,7 @@ import { ProblemError } from './core/problems/problem-error';
 import { PageTitle } from './core/routing/page-title';
 import { SESSION_PORT } from './core/session/session-port';
 import { Theme } from './core/theme/theme';
-import { JOB_ESTIMATES } from './jobs';
+import { laterWidgets } from './later-widgets';
 
 /** Asks who is here before the first page is chosen; an unreachable server is said, and everybody is a stranger until it answers. */
 async function begin(): Promise<void> {
@@ -53,6 +53,6 @@ export const appConfig = (catalogue: Catalogue): ApplicationConfig => ({
     PageTitle,
     { provide: TitleStrategy, useExisting: PageTitle },
     { provide: SESSION_PORT, useExisting: AccountsSession },
-    { provide: JOB_ESTIMATES, useValue: async () => (await import('./estimates')).JobEstimates },
+    laterWidgets,
   ],
 });

@@ -8,9 +8,9 @@ import { SESSION_PORT } from '../core/session/session-port';
 import { JobEstimates } from './job-estimates';
 
 const id = (number: number) => `018f0000-0000-7000-8000-0000000000${number}`;
-const job = { id: id(30), title: 'Pier table' };
+const job = { id: id(30), title: 'Pier table', state: 'open' };
 const estimate = {
-  ...{ id: id(31), number: '2026-007-1', title: 'Pier table', letter: 'B', members: 12 },
+  ...{ id: id(31), number: '2026-007-1', title: 'Pier table', kind: 'estimate', letter: 'B', members: 12 },
   changedAt: '2026-03-02T09:30:00.000Z',
 };
 
@@ -25,7 +25,7 @@ describe('JobEstimates', () => {
   };
   const button = (text: string) => [...element().querySelectorAll('button')].find((one) => spoken(one) === text);
 
-  async function open(items: unknown[], roles: readonly Role[] = ['estimator']): Promise<void> {
+  async function open(items: unknown[], roles: readonly Role[] = ['estimator'], state = 'open'): Promise<void> {
     TestBed.configureTestingModule({
       providers: [
         words,
@@ -38,7 +38,7 @@ describe('JobEstimates', () => {
     signIn(roles);
     http = TestBed.inject(HttpTestingController);
     fixture = TestBed.createComponent(JobEstimates);
-    fixture.componentRef.setInput('job', job);
+    fixture.componentRef.setInput('job', { ...job, state });
     TestBed.tick();
     TestBed.tick();
     http.expectOne(`/api/jobs/${job.id}/estimates`).flush({ items });
@@ -57,7 +57,12 @@ describe('JobEstimates', () => {
     await open([estimate], ['office']);
     const links = [...element().querySelectorAll('li a')].map((link) => link.getAttribute('href')?.split('/').at(-1));
     expect(links).toEqual(['price', 'sheets']);
-    expect(button('Begin a variation')).toBeUndefined();
+    expect(button('Begin another')).toBeUndefined();
+  });
+
+  it('leaves what follows a contract to where the contract stands', async () => {
+    await open([estimate], ['estimator'], 'accepted');
+    expect(button('Begin another')).toBeUndefined();
   });
 
   it('begins the first under the title of the job, once however often it is pressed', async () => {
@@ -75,14 +80,14 @@ describe('JobEstimates', () => {
     expect(navigate.mock.calls[0][0]).toEqual(['/jobs', job.id, 'estimates', estimate.id, 'measure']);
   });
 
-  it('begins the next as a variation, under the same id again where no answer came', async () => {
+  it('begins the next with its number in the title, under the same id again where no answer came', async () => {
     await open([estimate]);
     const ids: string[] = [];
     for (let press = 0; press < 2; press++) {
-      button('Begin a variation')?.click();
+      button('Begin another')?.click();
       await settle();
       const begun = http.expectOne(({ method }) => method === 'PUT');
-      expect(begun.request.body).toEqual({ title: 'Variation 1' });
+      expect(begun.request.body).toEqual({ title: 'Pier table, 2' });
       ids.push(begun.request.url);
       begun.error(new ProgressEvent('error'));
       await settle();

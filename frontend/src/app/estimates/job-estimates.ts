@@ -30,6 +30,10 @@ export class JobEstimates {
 
   protected readonly isBusy = signal(false);
   protected readonly mayBegin = computed(() => this.session.may('owner', 'estimator'));
+  /** What comes after a contract is a variation of it, begun where the contract stands. */
+  protected readonly mayBeginAnother = computed(
+    () => this.mayBegin() && !['accepted', 'finished'].includes(this.job().state),
+  );
   private readonly seesPrices = computed(() => this.session.may('owner', 'estimator', 'office'));
   protected readonly rows = computed(() =>
     this.store.estimates()?.map(({ id, number, title, letter, members, changedAt }) => ({
@@ -53,7 +57,7 @@ export class JobEstimates {
     this.isBusy.set(true);
     try {
       const count = this.store.estimates()?.length ?? 0;
-      const title = count === 0 ? this.job().title : $localize`Variation ${count}:number:`;
+      const title = count === 0 ? this.job().title : $localize`${this.job().title}:title:, ${count + 1}:number:`;
       const { id } = await this.store.begin(title);
       await this.router.navigate(['/jobs', this.job().id, 'estimates', id, 'measure']);
     } catch (error) {

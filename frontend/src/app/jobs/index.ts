@@ -1,4 +1,3 @@
 export { ClientField } from './client-field';
-export { JOB_ESTIMATES } from './job-estimates';
 export { JobStateMark } from './job-state-mark';
 export { jobStateNames } from './job-state-names';

@@ -10,7 +10,7 @@ import { signIn, words } from '../../test/sign-in';
 import { Notices } from '../core/problems/notices';
 import { SESSION_PORT } from '../core/session/session-port';
 import { Confirm } from '../ui/dialog/confirm';
-import { JOB_ESTIMATES } from './job-estimates';
+import { LATER_WIDGETS } from '../core/routing/later-widgets';
 import { JobPage } from './job-page';
 
 const id = (number: number) => `018f0000-0000-7000-8000-0000000000${number}`;
@@ -26,7 +26,15 @@ const job: Job = {
   ...{ kind: 'new', reference: '', site: 'Saloon', note: '', state: 'open', changedAt: '2026-05-04T10:00:00.000Z' },
 };
 const opened = {
-  ...{ id: id(31), at: '2026-05-04T10:00:00.000Z', accountId: id(32), name: 'Imke Vale', before: null, after: null, changes: [] },
+  ...{
+    id: id(31),
+    at: '2026-05-04T10:00:00.000Z',
+    accountId: id(32),
+    name: 'Imke Vale',
+    before: null,
+    after: null,
+    changes: [],
+  },
   ...{
     subject: { kind: 'job', id: id(11) },
     code: 'history-job-opened',
@@ -67,7 +75,7 @@ describe('JobPage', () => {
       providers: [
         ...[words, provideHttpClient(), provideHttpClientTesting(), { provide: SESSION_PORT, useValue: {} }],
         { provide: Confirm, useValue: confirm },
-        { provide: JOB_ESTIMATES, useValue: () => Promise.resolve(ItsEstimates) },
+        { provide: LATER_WIDGETS, useValue: { 'job-estimates': () => Promise.resolve(ItsEstimates) } },
         provideRouter(
           [
             { path: 'jobs/:jobId', component: JobPage },

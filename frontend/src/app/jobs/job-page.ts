@@ -1,4 +1,3 @@
-import { NgComponentOutlet } from '@angular/common';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -10,7 +9,6 @@ import {
   effect,
   inject,
   input,
-  resource,
   signal,
 } from '@angular/core';
 import { MatButton } from '@angular/material/button';
@@ -21,9 +19,9 @@ import { PageTitle } from '../core/routing/page-title';
 import { Session } from '../core/session/session';
 import { Confirm } from '../ui/dialog/confirm';
 import { EmptyState } from '../ui/page/empty-state';
+import { LaterWidget } from '../ui/page/later-widget';
 import { PageHeader } from '../ui/page/page-header';
 import { Skeleton } from '../ui/page/skeleton';
-import { JOB_ESTIMATES } from './job-estimates';
 import { JobForm } from './job-form';
 import { JobHistory } from './job-history';
 import { jobKindNames } from './job-kind-names';
@@ -34,8 +32,8 @@ import { JobStore } from './job-store';
 @Component({
   selector: 'app-job-page',
   imports: [
-    ...[EmptyState, JobForm, JobHistory, JobStateMark, MatButton, NgComponentOutlet, PageHeader],
-    ...[RouterLink, Skeleton],
+    ...[EmptyState, JobForm, JobHistory, JobStateMark, LaterWidget, MatButton],
+    ...[PageHeader, RouterLink, Skeleton],
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   providers: [JobStore],
@@ -49,11 +47,9 @@ export class JobPage {
   private readonly confirm = inject(Confirm);
   private readonly router = inject(Router);
   private readonly title = inject(PageTitle, { optional: true });
-  private readonly loadEstimates = inject(JOB_ESTIMATES, { optional: true });
 
   readonly jobId = input.required<string>();
 
-  protected readonly estimates = resource({ loader: async () => this.loadEstimates?.() });
   private readonly injector = inject(Injector);
   private readonly changeButton = viewChild<unknown, ElementRef<HTMLElement>>('change', { read: ElementRef });
   protected readonly isChanging = signal(false);

@@ -5,6 +5,7 @@ import type { CostedEstimate } from '#shared/estimates/estimate-schema';
 import type { PricedIssueSummary } from '#shared/estimates/issue-schema';
 import { Formats } from '../../core/formats/formats';
 import { EmptyState } from '../../ui/page/empty-state';
+import { LaterWidget } from '../../ui/page/later-widget';
 import { Skeleton } from '../../ui/page/skeleton';
 import { EstimateStore } from '../estimate-store';
 import { PartList } from '../parts/part-list';
@@ -38,6 +39,7 @@ import { Validity } from './validity';
     MarkForm,
     MatButton,
     MoneyBar,
+    LaterWidget,
     NgTemplateOutlet,
     PartList,
     PartPlace,
@@ -92,6 +94,17 @@ export class IssueViewPage {
   constructor() {
     inject(PlaceExplanation);
   }
+
+  /** What the client was sent has another state now. */
+  private readonly wentOut = (): void => {
+    this.read.reload();
+    this.store.reloadIssues();
+  };
+  protected readonly sendingInputs = computed(() => ({
+    issue: this.issue()?.summary,
+    jobId: this.store.ids()?.jobId,
+    sent: this.wentOut,
+  }));
 
   protected take(summary: PricedIssueSummary): void {
     this.read.update((issue) => issue && { ...issue, summary });

@@ -1,0 +1,2 @@
+export { IssueSending } from './issue-sending';
+export { JobAgreement } from './job-agreement';
