@@ -9,7 +9,8 @@ import {
 import { endpoint, sameForPriced } from '#shared/actor/endpoint';
 import { identifier } from '#shared/problems/entry-schema';
 
-const oneKind = z.strictObject({ kind: z.enum(letterKinds) });
+const kind = z.enum(letterKinds);
+const wordsOfKind = letterTextSchema.extend({ kind });
 
 export const listLetterTemplates = endpoint({
   name: 'listLetterTemplates',
@@ -24,10 +25,9 @@ export const keepLetterTemplate = endpoint({
   name: 'keepLetterTemplate',
   summary: 'Write the words of a kind of letter; version 0 where the workshop had none of its own',
   method: 'put',
-  path: '/api/letter-templates/:kind',
+  path: '/api/letter-templates',
   callers: ['owner', 'office'],
-  params: oneKind,
-  body: letterTextSchema,
+  body: wordsOfKind,
   versioned: true,
   answers: sameForPriced(letterTemplateSchema),
 });
@@ -35,10 +35,10 @@ export const keepLetterTemplate = endpoint({
 export const resetLetterTemplate = endpoint({
   name: 'resetLetterTemplate',
   summary: 'Go back to the words a kind of letter has of itself',
-  method: 'delete',
-  path: '/api/letter-templates/:kind',
+  method: 'post',
+  path: '/api/letter-templates/resets',
   callers: ['owner', 'office'],
-  params: oneKind,
+  body: z.strictObject({ kind }),
   answers: sameForPriced(letterTemplateSchema),
 });
 
@@ -46,10 +46,9 @@ export const previewLetter = endpoint({
   name: 'previewLetter',
   summary: 'A letter with these words as it would leave, filled with examples',
   method: 'post',
-  path: '/api/letter-templates/:kind/preview',
+  path: '/api/letter-templates/previews',
   callers: ['owner', 'office'],
-  params: oneKind,
-  body: letterTextSchema,
+  body: wordsOfKind,
   answers: sameForPriced(letterPreviewSchema),
 });
 

@@ -50,8 +50,11 @@ export async function openJob(visitor: Visitor, content: JobContent): Promise<st
 }
 
 /** A client in the workshop's name. */
-export const sampleClient = ({ mark, people }: TestWorkshop): Promise<string> =>
-  enterClient(people.owner.visitor, clientNamed(`${mark} client ${randomInt(1e6)}`, { address: `${mark} quay` }));
+export function sampleClient({ mark, people }: TestWorkshop): Promise<string> {
+  const number = randomInt(1e9);
+  const reached = { address: `${mark} quay`, email: `client-${number}@${mark.toLowerCase()}.example` };
+  return enterClient(people.owner.visitor, clientNamed(`${mark} client ${number}`, reached));
+}
 
 /** A job of a client, in the workshop's name. */
 export async function sampleJob(workshop: TestWorkshop): Promise<string> {

@@ -35,6 +35,7 @@ export type { DecisionRow } from './decision-model';
 export type { DecisionService } from './decision-service';
 export type { LetterFigures } from './letter-figures';
 export type { ClientLetter, LetterService } from './letter-service';
+export type { LetterTemplateService } from './letter-template-service';
 export type { QuestionRow } from './question-model';
 export type { QuestionService } from './question-service';
 export type { SignInService } from './sign-in-service';
@@ -54,6 +55,7 @@ export interface Agreements {
   readonly contracts: ContractService;
   readonly variations: VariationService;
   readonly letters: LetterService;
+  readonly templates: LetterTemplateService;
   readonly routes: readonly Route[];
 }
 
@@ -108,7 +110,7 @@ export function openAgreements(platform: Platform, needs: AgreementsNeeds): Agre
   });
   return {
     ...decided,
-    ...{ access, questions, letters },
+    ...{ access, questions, letters, templates },
     visits: new VisitService({ ...told, accesses }),
     signIns: new SignInService({ ...told, accesses, access, accounts }),
     routes: [...agreementRoutes({ ...decided, access, questions }), ...letterRoutes(letters, templates)],

@@ -15,11 +15,11 @@ export const letterRoutes = (letters: LetterService, templates: LetterTemplateSe
   mount(listLetterTemplates, async ({ actor }) => ({ items: await templates.all(actor.workshopId) })),
   mount(
     keepLetterTemplate,
-    ({ actor, params, version, body }) => templates.keep(actor, { ...params, version }, body),
+    ({ actor, version, body: { kind, ...text } }) => templates.keep(actor, { kind, version }, text),
     templates.present,
   ),
-  mount(resetLetterTemplate, ({ actor, params }) => templates.reset(actor, params.kind)),
-  mount(previewLetter, ({ actor, params, body }) => letters.preview(actor.workshopId, params.kind, body)),
+  mount(resetLetterTemplate, ({ actor, body }) => templates.reset(actor, body.kind)),
+  mount(previewLetter, ({ actor, body: { kind, ...text } }) => letters.preview(actor.workshopId, kind, text)),
   mount(listGivenUpLetters, async ({ actor }) => {
     const given = await letters.givenUp(actor.workshopId);
     return { items: given.map(presentGivenUp) };

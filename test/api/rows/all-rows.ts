@@ -1,11 +1,20 @@
 import type { ClientRows, MatrixRows } from '../matrix-row';
 import { accountsRows } from './accounts-rows';
+import { agreementsRows } from './agreements-rows';
+import { clientPageRows, visitsRows } from './client-page-rows';
 import { estimatesRows } from './estimates-rows';
 import { jobsRows } from './jobs-rows';
 import { rateCardsRows } from './rate-cards-rows';
 
 /** The rows of every feature. */
-export const allRows: MatrixRows = { ...accountsRows, ...rateCardsRows, ...jobsRows, ...estimatesRows };
+export const allRows: MatrixRows = {
+  ...accountsRows,
+  ...rateCardsRows,
+  ...jobsRows,
+  ...estimatesRows,
+  ...agreementsRows,
+  ...visitsRows,
+};
 
 /** The rows of what clients may call. */
-export const clientRows: ClientRows = {};
+export const clientRows: ClientRows = { ...clientPageRows };

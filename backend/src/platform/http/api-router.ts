@@ -37,7 +37,7 @@ function reader(endpoint: Endpoint): RequestHandler {
 const guarded =
   (endpoint: Endpoint): RequestHandler =>
   (request, _response, next) => {
-    guard(endpoint, signedInOf(request), request.client);
+    guard(endpoint, signedInOf(request), request.visitingClient);
     if (!endpoint.signature) refuseWithoutToken(request);
     next();
   };

@@ -6,8 +6,8 @@ declare module 'express-serve-static-core' {
     requestId: string;
     workshopId?: string;
     accountId?: string;
-    /** The client on a visit, if the session has one that still holds. */
-    client?: ClientActor | undefined;
+    /** The client on a visit, if the session has one that still holds. (`client` is Node's own word for the socket.) */
+    visitingClient?: ClientActor | undefined;
     /** The forgery token that the next session of the same person goes on with. */
     tokenToKeep?: string;
   }

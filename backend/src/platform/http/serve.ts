@@ -38,7 +38,7 @@ function callOf(endpoint: Endpoint, request: Request, sessions: Sessions): Call 
     ...parseRequest(endpoint, request),
     person: signedIn?.person,
     actor: signedIn?.actor,
-    client: request.client,
+    client: request.visitingClient,
     version: versionSeen(endpoint, request),
     upload: uploadOf(request),
     signed: signedOf(endpoint, request),
@@ -72,7 +72,7 @@ function withCurrent(route: Route, call: Call, error: unknown): unknown {
 
 const scopeOf = (endpoint: Endpoint, request: Request): string => {
   const signedIn = signedInOf(request);
-  if (endpoint.callers === 'client') return `client ${request.client?.accessId ?? ''}`;
+  if (endpoint.callers === 'client') return `client ${request.visitingClient?.accessId ?? ''}`;
   return signedIn?.actor?.membershipId ?? signedIn?.person.accountId ?? `address ${request.ip ?? ''}`;
 };
 

@@ -100,7 +100,7 @@ export class Sessions {
   private visitRead(): RequestHandler {
     return async (request, _response, next) => {
       const { visit } = request.session;
-      if (visit) request.client = await this.visits.load(visit);
+      if (visit) request.visitingClient = await this.visits.load(visit);
       next();
     };
   }

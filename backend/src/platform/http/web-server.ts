@@ -48,7 +48,7 @@ const named: RequestHandler = (request, _response, next) => {
     request.accountId = signedIn.person.accountId;
     request.workshopId = signedIn.actor?.workshopId;
   }
-  request.workshopId ??= request.client?.workshopId;
+  request.workshopId ??= request.visitingClient?.workshopId;
   next();
 };
 
