@@ -29,16 +29,20 @@ function lowestTerms(parts: number): string {
   return `${numerator}/${denominator}`;
 }
 
-/** Inches and a fraction to 1/32; what is smaller than half of that, in thousandths. */
+/** What is smaller than this is no fraction any more: half of a 32nd would be a sixth of it or more. */
+const leastFraction_nm = 3 * nanometresPer32ndInch;
+
+/** Inches and a fraction to 1/32; smaller ones that are not exactly a fraction (a ground, a lap) in thousandths. */
 function inchFigure(size_mm: number, locale: string): LengthFigure {
   const size_nm = Math.round(size_mm * nanometresPerMillimetre);
   const parts = Math.round(size_nm / nanometresPer32ndInch);
-  if (parts === 0 && size_nm > 0)
+  const isExact = parts * nanometresPer32ndInch === size_nm;
+  if (size_nm < leastFraction_nm && !isExact)
     return { figure: decimalFigure(size_mm / millimetresPerInch, 3, locale), isExact: false };
   const whole = Math.floor(parts / 32);
   const fraction = parts % 32 === 0 ? '' : lowestTerms(parts % 32);
   const figure = [whole > 0 || fraction === '' ? String(whole) : '', fraction].filter(Boolean).join(' ');
-  return { figure, isExact: parts * nanometresPer32ndInch === size_nm };
+  return { figure, isExact };
 }
 
 /** The figure of a length in mm or in inches with a fraction, negative ones with a minus; mm in. */
@@ -49,7 +53,7 @@ export function lengthFigure(length_mm: number, unit: LengthUnit, locale: string
 }
 
 /**
- * A length in mm written in mm (to 0.1, below 10 mm to 0.01) or in inches with a fraction to 1/32, ungrouped, so that `parseLength` reads
+ * A length in mm written in mm (to 0.1, below 10 mm to 0.01) or in inches with a fraction to 1/32 (below 3/32 in thousandths), ungrouped, so that `parseLength` reads
  * it back; ≈ stands before it when that is not its exact value.
  */
 export function formatLength(length_mm: number, unit: LengthUnit, locale: string): string {

@@ -71,6 +71,10 @@ describe('figures as a reader wants them', () => {
     ['mm', 25.4, '1 in'],
     ['mm', 12.7, '1/2 in'],
     ['mm', 0.12, '≈ 0.005 in'],
+    // A ground of eight coats: 0.96 mm ÷ 25.4.
+    ['mm', 0.96, '≈ 0.038 in'],
+    ['mm', 1.5875, '1/16 in'],
+    ['mm', 3.2, '≈ 1/8 in'],
     ['mm', 0, '0 in'],
     ['mm', -25.4, '−1 in'],
     ['mm2', 645.16, '1 in²'],

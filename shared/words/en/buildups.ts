@@ -51,7 +51,7 @@ export const buildups = {
     '{steps}: rags wet with oil heat up by themselves and can catch fire. Spread them out to dry or keep them under water in a lidded tin.',
   'caution-glue-allergy':
     '{steps}: animal glue can cause allergy of skin and breath. Gloves, and no breathing in of the powder.',
-  'caution-glue-heat': '{steps}: never let glue pass 55 °C. It loses its strength.',
+  'caution-glue-heat': '{steps}: never let glue pass 55\u00a0°C. It loses its strength.',
   'caution-defer': 'Follow local codes and the product’s safety data sheet; ask a licensed professional.',
   'buildup-window-closed': 'The next coat cannot be due before it may be put on.',
   'buildup-lag-leads-nowhere': 'This has to name a later step of the same build-up.',

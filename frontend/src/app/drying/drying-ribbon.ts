@@ -29,8 +29,10 @@ const zooms: readonly { readonly zoom: Zoom; readonly name: string }[] = [
 ];
 
 const row_px = 64;
-const holdRow_px = 36;
+const holdRow_px = 48;
 const head_px = 34;
+/** A week is wide enough for its number. */
+const leastDay_px = 8;
 const names_px = 176;
 
 /** The lots of a job and elapsed time: hands-on work solid, drying hatched, windows outlined, nights and closed days shaded. No dates. */
@@ -60,7 +62,7 @@ export class DryingRibbon {
     Math.max(1, Math.ceil(Math.max(this.elapsed_minutes(), this.carving_minutes()) / dayLength_minutes)),
   );
   private readonly day_px = computed(() => {
-    const fitting = Math.max(6, (this.width_px() - names_px) / this.days());
+    const fitting = Math.max(leastDay_px, (this.width_px() - names_px) / this.days());
     return { job: fitting, week: Math.max(fitting, 42), day: Math.max(fitting, 168) }[this.zoom()];
   });
 

@@ -27,7 +27,7 @@ describe('HoldTable', () => {
     const fixture = TestBed.createComponent(HoldTable, { bindings: [inputBinding('holds', () => holds)] });
     await fixture.whenStable();
     const rows = [...(fixture.nativeElement as HTMLElement).querySelectorAll('tbody tr')].map((row) =>
-      [...row.querySelectorAll('td')].map((cell) => cell.textContent?.trim()),
+      [...row.querySelectorAll('td')].map((cell) => cell.textContent?.trim().replaceAll('\u00a0', ' ')),
     );
     expect(rows).toEqual([
       [

@@ -7,6 +7,8 @@ import { FigureTable } from '../ui/table/figure-table';
 import { holdNames } from './hold-names';
 import type { WorkedHold } from './worked-hold';
 
+const unbroken = (text: string): string => text.replaceAll(' ', '\u00a0');
+
 /** Whose approval is waited for, how long that usually takes, and which steps wait: what the ribbon shows, in words. */
 @Component({
   selector: 'app-hold-table',
@@ -49,7 +51,7 @@ export class HoldTable {
     kind: 'text',
     text: ({ from_minutes, to_minutes }) => {
       const [first, last] = [this.day(from_minutes), this.day(Math.max(from_minutes, to_minutes - 1))];
-      return first === last ? $localize`day ${first}:day:` : $localize`day ${first}:day: to ${last}:lastDay:`;
+      return unbroken(first === last ? $localize`day ${first}:day:` : $localize`day ${first}:day: to ${last}:lastDay:`);
     },
   };
   protected readonly waits: FigureColumn<WorkedHold> = {
@@ -60,9 +62,8 @@ export class HoldTable {
   };
 
   private usualText({ usual_days }: WorkedHold): string {
-    return usual_days === 1
-      ? $localize`1 working day`
-      : $localize`${this.formats.number(usual_days, 0)}:days: working days`;
+    const days = this.formats.number(usual_days, 0);
+    return unbroken(usual_days === 1 ? $localize`1 working day` : $localize`${days}:days: working days`);
   }
 
   private waitsText({ waiting }: WorkedHold): string {

@@ -153,6 +153,21 @@ describe('The places of work', () => {
       expect(rows().map((row) => row[3])).toEqual(['420 cm²', '180 cm²']);
     });
 
+    it('names the build-up of an alternative that is not chosen', async () => {
+      const { rows, settle, store } = await open(GildPage);
+      const edge = store.members().find((one) => one.id === ids.edge);
+      if (!edge) throw new Error('there is no edge');
+      const { id: _id, ...content } = edge;
+      store.changeSettings({
+        alternatives: [{ id: id(40), name: 'Toned, not gilt', group: '', note: '', replaces: [] }],
+      });
+      const toned = { id: id(41), name: 'All of it, toned', buildUpId: 'toned-back', leafId: null };
+      const taken = zone({ ...toned, alternativeId: id(40) });
+      store.changeMember(ids.edge, { ...content, zones: [...content.zones, taken] });
+      await settle();
+      expect(rows()[1]?.slice(0, 2)).toEqual(['All of it, toned in “Toned, not gilt”', 'Toned back']);
+    });
+
     it('shows the bench no money', async () => {
       const { element, rows } = await open(GildPage, ['bench']);
       expect(rows()[0]).toHaveLength(5);
@@ -312,7 +327,7 @@ describe('The places of work', () => {
       const names = [...element.querySelectorAll('app-drying-ribbon .names li')].map((one) => one.textContent?.trim());
       expect(names).toEqual(expect.arrayContaining(['Carving approved', 'Sample board approved', 'Top fitted dry']));
       expect(element.querySelectorAll('app-drying-ribbon rect.hold')).toHaveLength(3);
-      expect(element.querySelector('app-hold-table')?.textContent).toContain('5 working days');
+      expect(element.querySelector('app-hold-table')?.textContent).toContain('5\u00a0working\u00a0days');
     });
 
     it('says once, beside the air, where nothing dries', async () => {

@@ -5,6 +5,7 @@ import type { Triple } from '#shared/units/triple';
 import type { Reason } from '#shared/words/reason';
 import { Formats } from '../core/formats/formats';
 import type { Explained } from '../ui/figure/explained';
+import { smallScreen } from '../ui/screen/small-screen';
 import type { FigureColumn } from '../ui/table/figure-column';
 import { FigureTable } from '../ui/table/figure-table';
 
@@ -43,12 +44,13 @@ type Column = FigureColumn<LeafOfProduct>;
 })
 export class LeafTotals {
   private readonly formats = inject(Formats);
+  private readonly isSmall = smallScreen();
 
   readonly products = input.required<readonly LeafOfProduct[]>();
 
   protected readonly idOf = (product: LeafOfProduct) => product.productId;
   protected readonly columns = computed<readonly Column[]>(() => [
-    { key: 'name', heading: $localize`Leaf`, kind: 'text', text: ({ name }) => name, minor: (row) => this.bought(row) },
+    { key: 'name', heading: $localize`Leaf`, kind: 'text', text: ({ name }) => name, minor: (row) => this.minor(row) },
     {
       key: 'leaves',
       heading: $localize`Leaves`,
@@ -63,7 +65,7 @@ export class LeafTotals {
       kind: 'figure',
       text: ({ booklets }) => this.formats.number(booklets, 0),
     },
-    ...this.coverage(),
+    ...(this.isSmall() ? [] : this.coverage()),
     ...this.cost(),
   ]);
 
@@ -74,7 +76,7 @@ export class LeafTotals {
         heading: $localize`Leaf ÷ surface`,
         kind: 'figure',
         text: ({ coverage }) => this.formats.number(coverage.grossToNet, 2, 2),
-        minor: ({ coverage }) => $localize`${this.formats.number(coverage.loss_percent, 0)}:loss: % lost and lapped`,
+        minor: ({ coverage }) => $localize`${this.formats.number(coverage.loss_percent, 0)}:loss: % lost, lapped`,
       },
       {
         key: 'each',
@@ -101,6 +103,17 @@ export class LeafTotals {
   private range({ grossLeaves_p10, grossLeaves_p90 }: LeafOfProduct): string {
     const [low, high] = [grossLeaves_p10, grossLeaves_p90].map((leaves) => this.formats.number(leaves, 0));
     return $localize`${low}:low: to ${high}:high:`;
+  }
+
+  /** What is bought; on a phone with what its columns leave out. */
+  private minor(row: LeafOfProduct): string {
+    const { coverage, mass_grams } = row;
+    const figures = [
+      $localize`${this.formats.number(coverage.grossToNet, 2, 2)}:ratio: times the surface`,
+      $localize`${this.formats.number(coverage.leavesPerM2, 0)}:leaves: per m²`,
+      this.formats.figure('grams', mass_grams),
+    ];
+    return [this.bought(row), ...(this.isSmall() ? figures : [])].filter(Boolean).join(' · ');
   }
 
   /** “1 pack of 20, 16 single booklets”. */

@@ -46,8 +46,7 @@ export class DryCautions {
 
   /** Zones by their members, lots by their build-ups; of most zones those it does not hold of are said. */
   private namesOf(about: readonly string[]): string[] {
-    const members = this.store.members();
-    const zones = members.flatMap((member) => member.zones.map((zone) => ({ member, zone })));
+    const zones = this.lots.coated().flatMap((member) => member.zones.map((zone) => ({ member, zone })));
     const told = zones.filter(({ zone }) => about.includes(zone.id));
     const rest = zones.filter(({ zone }) => !about.includes(zone.id));
     if (rest.length === 0 && zones.length > 1) return [$localize`everywhere`];

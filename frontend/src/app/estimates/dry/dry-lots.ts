@@ -30,7 +30,7 @@ export class DryLots {
     return pieces.length > 1 ? Object.fromEntries(pieces.map(({ id, name }) => [id, name])) : {};
   });
   /** Members with those zones alone that the choice of alternatives leaves. */
-  private readonly coated = computed<readonly Member[]>(() => {
+  readonly coated = computed<readonly Member[]>(() => {
     const worked = new Set(this.store.figures()?.zones.map(({ zoneId }) => zoneId));
     return this.store
       .members()
@@ -51,7 +51,8 @@ export class DryLots {
   readonly holds = computed<readonly WorkedHold[]>(() => {
     const holds = this.store.figures()?.dry.holds ?? [];
     const together = groupedBy(holds, ({ hold, from_minutes }) => `${hold} ${from_minutes}`);
-    return [...together.values()].flatMap((group) => {
+    const inOrder = [...together.values()].toSorted(([one], [other]) => one.from_minutes - other.from_minutes);
+    return inOrder.flatMap((group) => {
       const [{ hold, from_minutes, to_minutes, usual_days }] = group;
       const waiting = group.flatMap(({ lotId, stepId }) => this.waiting(lotId, stepId));
       return [{ hold, from_minutes, to_minutes, usual_days, waiting }];

@@ -81,7 +81,7 @@ export class LotMembers {
     const others = names.filter((name) => name !== member.lot || !this.grouping.isAlone(member));
     const present: Coated = member.lot === '' ? 'proposed' : `in ${member.lot}`;
     const choices: { value: Coated; label: string }[] = [
-      { value: 'proposed', label: $localize`with all built up alike` },
+      { value: 'proposed', label: $localize`as proposed` },
       ...others.map((name) => ({ value: `in ${name}` as const, label: $localize`in “${name}:lot:”` })),
       this.grouping.isAlone(member)
         ? { value: present, label: $localize`on its own` }

@@ -43,16 +43,18 @@ export class LotTable {
     };
     return [name, ...(this.isSmall() ? [] : this.times()), this.inWork()];
   });
-  protected readonly totals = computed(() => {
+  protected readonly totals = computed((): Readonly<Record<string, string>> => {
     const minutes = this.lots().reduce((sum, { handsOn_minutes }) => sum + handsOn_minutes, 0);
-    return { name: $localize`Together`, handsOn: this.hours(minutes) };
+    const [name, handsOn] = [$localize`Together`, this.hours(minutes)];
+    if (!this.isSmall()) return { name, handsOn };
+    return { name: $localize`${name}:together: ${handsOn}:hours: hands on` };
   });
 
   private times(): FigureColumn<ShownLot>[] {
     return [
       {
         key: 'handsOn',
-        heading: $localize`Hands on`,
+        heading: $localize`Hands on`.replaceAll(' ', '\u00a0'),
         kind: 'figure',
         text: ({ handsOn_minutes }) => this.hours(handsOn_minutes),
       },
@@ -89,6 +91,6 @@ export class LotTable {
     const [first, last] = [start_minutes, Math.max(start_minutes, end_minutes - 1)].map((at_minutes) =>
       this.formats.number(dayOf(at_minutes) + 1, 0),
     );
-    return $localize`day ${first}:day: to ${last}:lastDay:`;
+    return $localize`day ${first}:day: to ${last}:lastDay:`.replaceAll(' ', '\u00a0');
   }
 }

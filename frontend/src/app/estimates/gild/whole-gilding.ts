@@ -28,8 +28,18 @@ const figureColumns: readonly FigureColumn<ZoneOfJob>[] = [
   { key: 'buildUp', heading: $localize`Build-up`, kind: 'text', text: ({ buildUp }) => buildUp },
   { key: 'area', heading: $localize`True surface`, kind: 'figure', text: ({ area }) => area },
   { key: 'leaves', heading: $localize`Leaves`, kind: 'figure', text: ({ leaves }) => leaves },
-  { key: 'hours', heading: $localize`Hands-on h`, kind: 'figure', text: ({ hours }) => hours },
-  { key: 'recutting', heading: $localize`Recut h`, kind: 'figure', text: ({ recutting }) => recutting },
+  {
+    key: 'hours',
+    heading: $localize`Hands on, h`.replaceAll(' ', '\u00a0'),
+    kind: 'figure',
+    text: ({ hours }) => hours,
+  },
+  {
+    key: 'recutting',
+    heading: $localize`Recut, h`.replaceAll(' ', '\u00a0'),
+    kind: 'figure',
+    text: ({ recutting }) => recutting,
+  },
 ];
 
 /** The gilding of the whole job: leaf by product, and every zone. */
@@ -134,6 +144,6 @@ export class WholeGilding {
   /** What the columns of a phone leave out. */
   private small({ buildUp, laid, area, recutting }: ZoneOfJob): string {
     const recut = recutting && $localize`${recutting}:hours: h of recutting`;
-    return [buildUp, laid, area, recut].filter(Boolean).join(', ');
+    return [buildUp, laid, area, recut].filter(Boolean).join(' · ');
   }
 }

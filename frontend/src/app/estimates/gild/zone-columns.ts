@@ -10,6 +10,15 @@ import type { ZoneRow } from './zone-row';
 
 type Column = FigureColumn<ZoneRow>;
 
+/** A zone of an alternative that is not chosen was not worked: its build-up is named by the card, or as another zone has it. */
+function buildUpName({ zone, worked }: ZoneRow, store: EstimateStore): string {
+  if (worked) return worked.buildUp;
+  const known = store.card()?.buildUps.buildUps.find(({ id }) => id === zone.buildUpId)?.name;
+  const alike = store.members().flatMap(({ zones }) => zones.filter(({ buildUpId }) => buildUpId === zone.buildUpId));
+  const other = store.figures()?.zones.find(({ zoneId }) => alike.some(({ id }) => id === zoneId))?.buildUp;
+  return known ?? other ?? '';
+}
+
 /** The columns of the zones of a member. */
 @Injectable({ providedIn: 'root' })
 export class ZoneColumns {
@@ -23,11 +32,11 @@ export class ZoneColumns {
       heading: $localize`Zone`,
       kind: 'text',
       text: ({ zone }) => zone.name,
-      minor: (row) => (isSmall ? this.small(row) : this.alternative(row, store)),
+      minor: (row) => (isSmall ? this.small(row, store) : this.alternative(row, store)),
       editable: store.mayEdit(),
       remark,
     };
-    const wide = [this.buildUp(), this.laid(), this.area()];
+    const wide = [this.buildUp(store), this.laid(), this.area()];
     return [name, ...(isSmall ? [] : wide), this.leaves(), ...(store.costed() ? [this.money()] : [])];
   }
 
@@ -55,12 +64,12 @@ export class ZoneColumns {
     return this.formats.area(area_mm2);
   }
 
-  private buildUp(): Column {
+  private buildUp(store: EstimateStore): Column {
     return {
       key: 'buildUp',
       heading: $localize`Build-up`,
       kind: 'text',
-      text: ({ zone, worked }) => worked?.buildUp ?? zone.buildUpId,
+      text: (row) => buildUpName(row, store),
     };
   }
 
@@ -105,11 +114,11 @@ export class ZoneColumns {
   }
 
   /** What the columns of a phone leave out. */
-  private small({ worked }: ZoneRow): string {
-    if (!worked) return '';
-    return [worked.buildUp, worked.leaf ? laidAs(worked.leaf) : '', this.areaText(worked.true_mm2)]
-      .filter(Boolean)
-      .join(', ');
+  private small(row: ZoneRow, store: EstimateStore): string {
+    const { worked } = row;
+    const laid = worked?.leaf ? laidAs(worked.leaf) : '';
+    const area = worked ? this.areaText(worked.true_mm2) : '';
+    return [buildUpName(row, store), laid, area, this.alternative(row, store)].filter(Boolean).join(' · ');
   }
 
   private alternative({ zone }: ZoneRow, store: EstimateStore): string {

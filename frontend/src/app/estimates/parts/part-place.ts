@@ -28,7 +28,7 @@ import { EstimateStore } from '../estimate-store';
       <ng-content select="[above]" />
       @if (!unexplained()) {
         <h3 class="visually-hidden" i18n>Reasons</h3>
-        <app-reason-panel (houseChosen)="openCard($event)" />
+        <app-reason-panel [mayChange]="store.mayEdit()" (houseChosen)="openCard($event)" />
       }
       <ng-content select="[beside]" />
     </aside>
@@ -36,7 +36,7 @@ import { EstimateStore } from '../estimate-store';
   styleUrl: '../places/member-place.scss',
 })
 export class PartPlace {
-  private readonly store = inject(EstimateStore);
+  protected readonly store = inject(EstimateStore);
   private readonly router = inject(Router);
 
   /** What the list is of. */

@@ -25,14 +25,14 @@ import { MemberSelection } from '../members/member-selection';
       <ng-content />
     </div>
     <aside class="beside" i18n-aria-label aria-label="Reasons">
-      <app-reason-panel (houseChosen)="openCard($event)" />
+      <app-reason-panel [mayChange]="store.mayEdit()" (houseChosen)="openCard($event)" />
       <ng-content select="[beside]" />
     </aside>
   `,
   styleUrl: './member-place.scss',
 })
 export class MemberPlace {
-  private readonly store = inject(EstimateStore);
+  protected readonly store = inject(EstimateStore);
   private readonly router = inject(Router);
   protected readonly selection = inject(MemberSelection);
 

@@ -45,6 +45,14 @@ describe('A figure and the panel of its reasons', () => {
     expect(chosen).toEqual(['leaf.reliefs.middle']);
   });
 
+  it('mark house values and open none to whoever may not change them', async () => {
+    TestBed.inject(Explanation).show(explained(41.9));
+    const panel = TestBed.createComponent(ReasonPanel, { bindings: [inputBinding('mayChange', () => false)] });
+    await panel.whenStable();
+    const marks = (panel.nativeElement as HTMLElement).querySelectorAll('.house');
+    expect([...marks].map(({ tagName, textContent }) => [tagName, textContent])).toEqual([['SPAN', 'house value']]);
+  });
+
   it('follow the figure while it is worked out anew', async () => {
     const current = signal(explained(41.9));
     const figure = TestBed.createComponent(Figure, {

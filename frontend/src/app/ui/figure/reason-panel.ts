@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, inject, output } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
 import { MatIconButton } from '@angular/material/button';
 import type { Reason } from '#shared/words/reason';
 import { Formats } from '../../core/formats/formats';
@@ -22,6 +22,9 @@ export class ReasonPanel {
 
   /** The path of a house value in the rate card, when the person wants to change it. */
   readonly houseChosen = output<string>();
+
+  /** Whether whoever reads may change house values; to others they are only marked. */
+  readonly mayChange = input(true);
 
   protected readonly explained = this.explanation.current;
   protected readonly steps = computed(() => (this.explained()?.reasons ?? []).map((reason) => this.step(reason)));
