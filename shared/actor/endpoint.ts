@@ -31,6 +31,8 @@ export interface Endpoint {
   readonly signature?: string;
   readonly idempotent?: boolean;
   readonly versioned?: boolean;
+  /** How many are served at once, where the work is costly; the others wait their turn before anything is taken for them. */
+  readonly atOnce?: number;
 }
 
 /** Declares an endpoint, keeping the exact types of its parts. */

@@ -55,6 +55,7 @@ export const changeEstimate = endpoint({
   callers: ['owner', 'estimator'],
   params: oneEstimate,
   body: changesSchema,
+  atOnce: 6,
   answers: { cost: keptChangesSchema },
 });
 
@@ -77,6 +78,7 @@ export const readAlternatives = endpoint({
   path: '/api/estimates/:estimateId/alternatives',
   callers: ['owner', 'estimator', 'office'],
   params: oneEstimate,
+  atOnce: 4,
   answers: sameForPriced(z.strictObject({ items: z.array(alternativeTotalSchema) })),
 });
 

@@ -33,6 +33,7 @@ export const issueEstimate = endpoint({
   params: oneEstimate,
   body: issueRequestSchema,
   idempotent: true,
+  atOnce: 2,
   answers: { cost: pricedIssueSummarySchema },
 });
 
@@ -95,5 +96,6 @@ export const readBenchSheet = endpoint({
   callers: ['owner', 'estimator', 'office', 'bench'],
   params: oneEstimate.extend({ pieceId: identifier }),
   media: 'application/pdf',
+  atOnce: 4,
   answers: { cost: z.unknown(), price: z.unknown(), bench: z.unknown() },
 });

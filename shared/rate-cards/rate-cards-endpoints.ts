@@ -137,6 +137,7 @@ export const exportRateCard = endpoint({
   callers: ['owner', 'estimator'],
   params: oneCard,
   media: workbook,
+  atOnce: 2,
   answers: { cost: z.unknown() },
 });
 
@@ -149,5 +150,6 @@ export const importRateCard = endpoint({
   params: oneCard,
   upload: 'workbook',
   versioned: true,
+  atOnce: 2,
   answers: summary,
 });

@@ -10,6 +10,7 @@ import { keyOf, type IdempotencyKeys } from './idempotency';
 import type { Route } from './mount';
 import { parseRequest, versionSeen } from './parse';
 import { send } from './send';
+import { Turns } from './turns';
 
 /** What serving a route needs beside the route. */
 export interface Serving {
@@ -89,13 +90,14 @@ export function serve(route: Route, serving: Serving): RequestHandler {
       () => run(request, call),
     );
   };
+  const turns = endpoint.atOnce === undefined ? undefined : new Turns(endpoint.atOnce);
   return async (request: Request, response: Response) => {
     const call = callOf(endpoint, request, serving.sessions);
     const work =
       endpoint.method === 'get'
         ? () => run(request, call)
         : () => serving.database.transaction(() => once(request, call));
-    const answer = await work().catch((error: unknown) => Promise.reject(withCurrent(route, call, error) as Error));
+    const answer = await (turns ? turns.take(work) : work()).catch((error: unknown) => Promise.reject(withCurrent(route, call, error) as Error));
     send(endpoint, { request, response }, answer);
   };
 }
