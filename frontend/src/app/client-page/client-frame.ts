@@ -92,5 +92,7 @@ export class ClientFrame {
   readonly letterhead = input<ClientLetterhead>();
 
   protected readonly logo = addressOf(readClientLogo);
-  protected readonly address = computed(() => this.letterhead()?.addressLines.join(', ') ?? '');
+  protected readonly address = computed(() =>
+    (this.letterhead()?.addressLines ?? []).filter((line) => line !== this.letterhead()?.name).join(', '),
+  );
 }

@@ -1,3 +1,4 @@
+import { NgTemplateOutlet } from '@angular/common';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -36,7 +37,7 @@ import { ClientThread } from './client-thread';
   selector: 'app-client-issue-page',
   imports: [
     ...[ClientChoices, ClientDecline, ClientFrame, ClientLines, ClientPayments, ClientPieces, ClientReview],
-    ...[ClientThread, EmptyState, FindingList, MatButton, RouterLink, Skeleton],
+    ...[ClientThread, EmptyState, FindingList, MatButton, NgTemplateOutlet, RouterLink, Skeleton],
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   providers: [ClientIssueStore],
