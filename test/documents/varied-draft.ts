@@ -76,6 +76,7 @@ function memberOf(place: number): fc.Arbitrary<Member> {
       zones: fc.tuple(zoneOf(`${id}a`, 55), zoneOf(`${id}b`, 30)),
       carved: fc.uniqueArray(fc.constantFrom(...ornaments), { maxLength: 3 }),
       isUndercut: fc.boolean(),
+      lot: fc.constantFrom('', '', 'Frame', `Member ${place}`),
       opening_mm2: fc.constantFrom(0, 0, 900),
     })
     .map(({ kind, carved, isUndercut, opening_mm2, ...rest }) =>

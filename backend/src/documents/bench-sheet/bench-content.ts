@@ -43,12 +43,12 @@ function findingsOf(request: BenchSheetRequest, own: ReadonlySet<string>): Findi
   return request.figures.findings.filter(({ about }) => about === undefined || own.has(about) || !foreign.has(about));
 }
 
-function benchLot(lot: DryLot, own: Pick<BenchContent, 'members' | 'zones'>, used: readonly UsedBuildUp[]): BenchLot {
+function benchLot(lot: DryLot, own: Pick<BenchContent, 'members' | 'zones'>): BenchLot {
   const coated = zonesOfLot(own.members, lot.lotId);
   const zones = own.zones.filter(({ zoneId }) => coated.some(({ zone }) => zone.id === zoneId));
   const members = own.members.filter(({ id }) => zones.some(({ memberId }) => memberId === id));
   const name = members.at(0)?.lot ?? '';
-  return { lot, used: used.find((one) => one.buildUp === lot.buildUp) ?? null, name, zones, members };
+  return { lot, used: buildUpsUsed(zones).at(0) ?? null, name, zones, members };
 }
 
 /** Gathers a piece and its work; RangeError for a piece the draft does not hold. */
@@ -61,12 +61,11 @@ export function benchContent(request: BenchSheetRequest): BenchContent {
   const zones = figures.zones.filter((zone) => ids.has(zone.memberId));
   const uses = figures.uses.filter((use) => ids.has(use.memberId));
   const lots = figures.dry.lots.filter((lot) => lot.pieceId === pieceId);
-  const used = buildUpsUsed(zones);
   const own = [piece.id, ...ids, ...zones.map((zone) => zone.zoneId), ...uses.map((use) => use.useId)];
   return {
     ...{ request, piece, members, zones, uses },
     words: paperWords(request.workshop),
-    lots: lots.map((lot) => benchLot(lot, { members, zones }, used)),
+    lots: lots.map((lot) => benchLot(lot, { members, zones })),
     findings: findingsOf(request, new Set([...own, ...lots.map((lot) => lot.lotId)])),
   };
 }

@@ -38,6 +38,19 @@ describe('the bench sheet of a piece', () => {
     expect(text).toContain('Burnish: finished within 1 d of beginning this.');
   });
 
+  it('heads each lot with its name and what is coated in it', async () => {
+    expect(text).toContain('Wood Top edge, Leg, heron Step');
+    const own = smallDraft();
+    const members = own.members.map((member) => (member.id === 'leg' ? { ...member, lot: 'Legs' } : member));
+    const apart = sampleSnapshot({ ...own, members });
+    const sheet = textOfPaper(await benchSheet({ ...request, draft: apart.draft, figures: apart.figures }));
+    expect(sheet).toContain('Wood Top edge Step');
+    expect(sheet).toContain('Legs: Water gilding, burnished Tone');
+    expect(sheet).toContain('Wood Leg, heron Step');
+    // The edge is recut and gets eight coats, the carved legs four.
+    expect(sheet).not.toMatch(/Gesso +4 to 8 /);
+  });
+
   it('says how the leaf is laid', () => {
     expect(text).toContain('3 strips a leaf, 26.7 mm wide, laps 3.2 mm.');
     expect(text).toContain('patches, each leaf cut 2 by 2, laps 3.2 mm.');
