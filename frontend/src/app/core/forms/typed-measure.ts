@@ -28,17 +28,23 @@ const isObject = (value: unknown): value is object => typeof value === 'object' 
 export const isTypedMeasure = (value: unknown): value is LengthEntry | AreaEntry =>
   isObject(value) && 'text' in value && ('mm' in value || 'mm2' in value);
 
-/** A length as somebody here would type it, without its unit. */
+/** A length as somebody here would type it; in inches without its unit, unless no 1/32 says the whole truth: then in mm. */
 function lengthText(length_mm: number, { unit, locale }: Writing): string {
-  if (unit === 'mm') return formatDecimal(String(length_mm), locale);
-  return lengthFigure(length_mm, unit, locale).figure;
+  const exact_mm = formatDecimal(String(length_mm), locale);
+  if (unit === 'mm') return exact_mm;
+  const { figure, isExact } = lengthFigure(length_mm, unit, locale);
+  return isExact ? figure : `${exact_mm} mm`;
 }
 
-/** An area as somebody here would type it. */
+// Twelve figures are more than anybody measures, and leave out what a float adds at its end.
+const clean = (size: number): number => Number(size.toPrecision(12));
+
+/** An area as somebody here would type it: in square inches where three decimals say the whole truth, else in cm². */
 function areaText(area_mm2: number, { unit, locale }: Writing): string {
-  const [size, sign] =
-    unit === 'mm' ? [inMetric(area_mm2, 'mm2', 'cm2'), 'cm²'] : [area_mm2 / squareMillimetresPerSquareInch, 'in²'];
-  return `${formatDecimal(String(Number(size.toFixed(3))), locale)} ${sign}`;
+  const size_in2 = clean(area_mm2 / squareMillimetresPerSquareInch);
+  const isExact = unit === 'in' && Math.abs(size_in2 - Number(size_in2.toFixed(3))) < 1e-9;
+  const [size, sign] = isExact ? [size_in2, 'in²'] : [clean(inMetric(area_mm2, 'mm2', 'cm2')), 'cm²'];
+  return `${formatDecimal(String(size), locale)} ${sign}`;
 }
 
 /** The entry of a length or an area by the ending of its name, shown as it was typed where that is known. */
