@@ -41,7 +41,14 @@ function latestPlan(
   const first = networkPlan(positions);
   const bound = networkBound(network, earliest, first.finish);
   const { search } = wanted;
-  const improving = { first, bound, limit: search.limit ?? {}, seed: search.seed ?? 1, onBetter: () => undefined };
+  const improving = {
+    first,
+    bound,
+    limit: search.limit ?? {},
+    seed: search.seed ?? 1,
+    lots: ready.request.tasks.map(({ lotId }) => lotId),
+    onBetter: () => undefined,
+  };
   const { plan, plans } = improvedPlan(blocked, improving);
   return { plan: networkPlan(seenForward(ready, network, plan.positions)), plans };
 }
@@ -61,6 +68,7 @@ export function backwardProgramme(ready: RequestNetwork, first: NetworkPlan, sea
     bound: Math.max(bound, Math.min(finish, first.finish)),
     limit: search.limit ?? {},
     seed: search.seed ?? 1,
+    lots: ready.request.tasks.map(({ lotId }) => lotId),
     onBetter: () => undefined,
   };
   const { plan, plans } = improvedPlan({ network: ready.network, blocks: ready.blocks }, improving);

@@ -1,3 +1,4 @@
+import type { HoldLengths } from '#shared/programme/place-room';
 import { SerialPlan, type PlanFailure } from '#shared/programme/serial-plan';
 import type { TaskBlock } from '#shared/programme/task-blocks';
 import type { Position, TaskNetwork } from '#shared/programme/task-network';
@@ -17,9 +18,10 @@ export interface BlockedNetwork {
 export interface PlanHints {
   readonly preferred?: readonly (readonly number[] | null)[];
   readonly standing?: readonly (Position | null)[];
+  readonly lengths?: HoldLengths;
 }
 
-const unknown: PlanFailure = { task: 0, arc: null };
+const unknown: PlanFailure = { task: 0, arc: null, isHeld: false };
 
 /** Blocks that still wait for their place, the most urgent first. */
 interface Waiting {
@@ -33,21 +35,33 @@ interface Waiting {
 export function serialResult(
   { network, blocks }: BlockedNetwork,
   priorities: readonly number[],
-  { preferred, standing = [] }: PlanHints = {},
+  { preferred, standing = [], lengths }: PlanHints = {},
 ): SerialResult {
-  const plan = new SerialPlan(network, preferred);
+  const plan = new SerialPlan(network, preferred, lengths);
   standing.forEach((position, task) => position && !network.tasks[task].anchor && plan.put(task, position));
   const isDone = blocks.map(({ tasks }) => tasks.every((task) => plan.positions[task] !== null));
   const urgency = blocks.map(({ tasks }) => Math.min(...tasks.map((task) => priorities[task])));
   const waiting: Waiting = { blocks, isDone, urgency, queue: [] };
   isDone.forEach((done, at) => !done && enqueue(waiting, at));
   while (waiting.queue.length > 0) {
-    const place = waiting.queue.findIndex((at) => isReady(blocks[at], isDone) && placed(plan, waiting, at));
+    const place = nextPlaced(plan, waiting);
     if (place < 0) return { positions: null, failure: plan.failure ?? unknown };
     isDone[waiting.queue[place]] = true;
     waiting.queue.splice(place, 1);
   }
   return { positions: plan.positions.filter((position) => position !== null), failure: null };
+}
+
+/** The first in the queue that is ready and finds its place; one that finds none for another reason than a held place ends it, −1. */
+function nextPlaced(plan: SerialPlan, waiting: Waiting): number {
+  const { queue, blocks, isDone } = waiting;
+  for (let place = 0; place < queue.length; place += 1) {
+    const block = queue[place];
+    if (!isReady(blocks[block], isDone)) continue;
+    if (placed(plan, waiting, block)) return queue.indexOf(block);
+    if (!plan.failure?.isHeld) return -1;
+  }
+  return -1;
 }
 
 const isReady = ({ before }: TaskBlock, isDone: readonly boolean[]): boolean => before.every((one) => isDone[one]);
@@ -62,7 +76,7 @@ function placed(plan: SerialPlan, waiting: Waiting, at: number): boolean {
   const { blocks, isDone } = waiting;
   for (const task of blocks[at].tasks) plan.lift(task);
   while (!plan.placeBlock(blocks[at])) {
-    const inTheWay = plan.failure?.arc?.to;
+    const inTheWay = plan.failure?.arc?.to ?? plan.failure?.holder;
     const other = blocks.findIndex(
       ({ tasks }, block) => block !== at && inTheWay !== undefined && tasks.includes(inTheWay),
     );

@@ -2,7 +2,7 @@ import type { ProgrammeTask } from '#shared/programme/programme-request';
 import { commonSpans } from '#shared/programme/person-spans';
 import type { Person } from '#shared/programme/shop-calendar';
 import type { Crew } from '#shared/programme/task-network';
-import { WorkingSpans } from '#shared/programme/working-spans';
+import type { WorkingSpans } from '#shared/programme/working-spans';
 import { countUp } from '#shared/money/settled';
 
 /** More ways than these to make up a crew are not looked at: a workshop of five has ten pairs. */

@@ -24,6 +24,8 @@ export interface Improving {
   readonly bound: number;
   readonly limit: SearchLimit;
   readonly seed: number;
+  /** The lot of each task. */
+  readonly lots: readonly string[];
   readonly onBetter: (plan: NetworkPlan) => void;
 }
 
@@ -36,22 +38,34 @@ const lateness = ({ positions }: NetworkPlan): number => positions.reduce((sum, 
 const isBetter = (one: NetworkPlan, other: NetworkPlan): boolean =>
   one.finish < other.finish || (one.finish === other.finish && lateness(one) < lateness(other));
 
-/** The order in which a plan stands when everything is put off as far as its finish allows (double justification of Valls, Ballestín, Quintanilla 2005, from memory). */
-function justified({ network }: BlockedNetwork, plan: NetworkPlan): readonly number[] | null {
-  const mirror = mirroredNetwork(network, plan.finish);
-  const earliest = earliestTimes(mirror);
-  const blocks = taskBlocks(mirror, earliest.starts);
-  const back = serialResult(
-    { network: mirror, blocks },
-    plan.positions.map(({ end }) => -end),
-  );
-  return back.positions && back.positions.map(({ end }) => -end);
+/** The blocks of a network seen backward; their order inside hardly depends on the finish, so they are found once. */
+function blocksBackward({ network }: BlockedNetwork, finish: number): BlockedNetwork['blocks'] {
+  const mirror = mirroredNetwork(network, finish);
+  return taskBlocks(mirror, earliestTimes(mirror).starts);
 }
 
-function shaken(plan: NetworkPlan, share: number, next: Generator32): number[] {
+/** The order in which a plan stands when everything is put off as far as its finish allows (double justification of Valls, Ballestín, Quintanilla 2005, from memory). */
+function justified(
+  { network }: BlockedNetwork,
+  blocks: BlockedNetwork['blocks'],
+  plan: NetworkPlan,
+): readonly number[] | null {
+  const ends = plan.positions.map(({ end }) => -end);
+  const { positions } = serialResult({ network: mirroredNetwork(network, plan.finish), blocks }, ends);
+  return positions && positions.map(({ end }) => -end);
+}
+
+/** The starts of a plan shaken, each by itself or those of one lot together. */
+function shaken(
+  plan: NetworkPlan,
+  { share, lots }: { readonly share: number; readonly lots: readonly string[] | null },
+  next: Generator32,
+): number[] {
   const [first, span] = [Math.min(...plan.positions.map(({ start }) => start)), plan.finish];
   const spread = Math.max(1, span - first) * share;
-  return plan.positions.map(({ start }) => start + (spread * next()) / 2 ** 32);
+  const draw = (): number => (spread * next()) / 2 ** 32;
+  const byLot = new Map([...new Set(lots ?? [])].map((lot) => [lot, draw()]));
+  return plan.positions.map(({ start }, at) => start + (byLot.get(lots?.[at] ?? '') ?? draw()));
 }
 
 /** How far priorities are shaken, in parts of the whole time, one try after another. */
@@ -71,11 +85,16 @@ export function improvedPlan(
   let best = improving.first;
   let current = best;
   let plans = 0;
+  const backward = blocksBackward(blocked, best.finish);
   let isSettled = false;
   while (best.finish > bound && plans < most && !limit.shouldStop?.()) {
     plans += 1;
-    const order = isSettled ? null : justified(blocked, current);
-    const { positions } = serialResult(blocked, order ?? shaken(best, shares[plans % shares.length], next));
+    const order = isSettled ? null : justified(blocked, backward, current);
+    const { positions } = serialResult(
+      blocked,
+      order ??
+        shaken(best, { share: shares[plans % shares.length], lots: plans % 2 === 0 ? improving.lots : null }, next),
+    );
     isSettled = !positions;
     if (!positions) continue;
     const plan = networkPlan(positions);

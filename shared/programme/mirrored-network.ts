@@ -30,8 +30,8 @@ export const mirroredPosition = ({ start, end }: Position, crew: Crew): Position
   crew,
 });
 
-/** A network seen backward in time with the crews of each task in the same order, everything done by a moment: what is early there is late here. */
-export function mirroredNetwork(network: TaskNetwork, finish: number): TaskNetwork {
+/** A network seen backward in time with the crews of each task in the same order: what is early there is late here. */
+function mirrorOf(network: TaskNetwork): TaskNetwork {
   const known = new Map<WorkingSpans, WorkingSpans>();
   const mirrored = (spans: WorkingSpans): WorkingSpans => {
     const made = known.get(spans) ?? spans.mirrored();
@@ -42,7 +42,7 @@ export function mirroredNetwork(network: TaskNetwork, finish: number): TaskNetwo
   const tasks = network.tasks.map((task): NetworkTask => ({
     crews: task.crews.map(crewOf),
     isBreakable: task.isBreakable,
-    release: -finish,
+    release: -Infinity,
     anchor: task.anchor && mirroredPosition(task.anchor, crewOf(task.anchor.crew)),
   }));
   const places = network.places.map(({ capacity, taken, holds }) => ({
@@ -51,4 +51,14 @@ export function mirroredNetwork(network: TaskNetwork, finish: number): TaskNetwo
     holds: holds.map(({ from, until, amount }) => ({ from: until, until: from, amount })),
   }));
   return taskNetwork({ tasks, arcs: network.arcs.map(mirroredArc), places, people: network.people });
+}
+
+/** What was turned round once is not turned round again for another finish. */
+const mirrors = new WeakMap<TaskNetwork, TaskNetwork>();
+
+/** A network seen backward in time, everything done by a moment. */
+export function mirroredNetwork(network: TaskNetwork, finish: number): TaskNetwork {
+  const mirror = mirrors.get(network) ?? mirrorOf(network);
+  mirrors.set(network, mirror);
+  return { ...mirror, tasks: mirror.tasks.map((task) => ({ ...task, release: -finish })) };
 }

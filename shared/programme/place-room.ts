@@ -1,22 +1,37 @@
 import type { NetworkHold, NetworkPlace, Position } from '#shared/programme/task-network';
 
-interface Stretch {
+/** Room taken from one moment to another. */
+export interface Stretch {
   readonly start: number;
   readonly end: number;
   readonly amount: number;
 }
 
-/** What is held of a place now; a hold whose last task has no place yet goes on without an end. */
-function stretches(
-  { taken, holds }: NetworkPlace,
+/** How long a hold lasts whose last task has no place yet; without an end where nothing is known. */
+export type HoldLengths = ReadonlyMap<NetworkHold, number>;
+
+/** The stretch of a hold as far as it is known; null while nothing of it has its place. */
+export function holdStretch(
+  hold: NetworkHold,
   positions: readonly (Position | null)[],
-  but: NetworkHold,
-): Stretch[] {
-  const held = holds.flatMap((hold): Stretch[] => {
-    const from = hold === but ? null : positions[hold.from];
-    return from ? [{ start: from.start, end: positions[hold.until]?.end ?? Infinity, amount: hold.amount }] : [];
-  });
-  return [...taken, ...held];
+  lengths: HoldLengths,
+): Stretch | null {
+  const from = positions[hold.from];
+  if (!from) return null;
+  const end = positions[hold.until]?.end ?? from.start + (lengths.get(hold) ?? Infinity);
+  return { start: from.start, end, amount: hold.amount };
+}
+
+/** What is held of a place now by others. */
+const stretches = ({ taken, holds }: NetworkPlace, but: NetworkHold, { positions, lengths }: HoldState): Stretch[] => [
+  ...taken,
+  ...holds.flatMap((hold) => (hold === but ? [] : (holdStretch(hold, positions, lengths) ?? []))),
+];
+
+/** Where tasks stand, and what is known of holds that are open still. */
+export interface HoldState {
+  readonly positions: readonly (Position | null)[];
+  readonly lengths: HoldLengths;
 }
 
 /**
@@ -26,10 +41,10 @@ function stretches(
 export function roomFrom(
   place: NetworkPlace,
   hold: NetworkHold,
-  at: { readonly start: number; readonly length: number; readonly positions: readonly (Position | null)[] },
+  at: HoldState & { readonly start: number; readonly length: number },
 ): number {
   if (hold.amount > place.capacity) return Infinity;
-  const others = stretches(place, at.positions, hold).filter((one) => one.end > at.start);
+  const others = stretches(place, hold, at).filter((one) => one.end > at.start);
   const used = (moment: number): number =>
     others.reduce((sum, one) => (one.start <= moment && moment < one.end ? sum + one.amount : sum), 0);
   let start = at.start;

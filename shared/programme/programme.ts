@@ -1,6 +1,5 @@
 import { continuousProject, positionsOfStarts } from '#shared/programme/continuous-project';
 import { backwardProgramme } from '#shared/programme/backward-programme';
-import { serialResult } from '#shared/programme/block-order';
 import { improvedPlan, networkPlan, type NetworkPlan } from '#shared/programme/improved-plan';
 import { networkBound } from '#shared/programme/network-bound';
 import { daysUntil, networkOf } from '#shared/programme/network-of';
@@ -11,8 +10,9 @@ import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeRequest, ProgrammeSearch } from '#shared/programme/programme-request';
 import { projectSchedule } from '#shared/programme/project-schedule';
 import { described, noPlan } from '#shared/programme/described-programme';
-import { firstResult, latestFirst, type RequestNetwork } from '#shared/programme/request-network';
-import { positionsOf, standingPositions } from '#shared/programme/standing-positions';
+import { firstResult, type RequestNetwork } from '#shared/programme/request-network';
+import { replannedFrom } from '#shared/programme/replanned-from';
+import { positionsOf } from '#shared/programme/standing-positions';
 import type { Position } from '#shared/programme/task-network';
 
 /** A plan known already, where it still keeps every rule. */
@@ -20,17 +20,6 @@ function keptPlan(ready: RequestNetwork, plan: Programme | undefined): NetworkPl
   if (!plan) return null;
   const positions = positionsOf(ready, plan);
   return planBreaches(ready.network, positions).length === 0 ? networkPlan(positions as Position[]) : null;
-}
-
-/** The earlier plan with what has to move found new places; null where none are found round what stands. */
-function replanned(ready: RequestNetwork, previous: Programme): NetworkPlan | null {
-  const standing = standingPositions(ready, previous);
-  const people = new Map(previous.tasks.map(({ taskId, personIds }) => [taskId, personIds]));
-  const preferred = ready.request.tasks.map(
-    ({ id }) => people.get(id)?.map((one) => ready.request.people.findIndex((person) => person.id === one)) ?? null,
-  );
-  const { positions } = serialResult(ready, latestFirst(ready), { standing, preferred });
-  return positions && planBreaches(ready.network, positions).length === 0 ? networkPlan(positions) : null;
 }
 
 /** The proven best where the request is the published problem, or what came of it before the limit; null where it is another. */
@@ -58,13 +47,20 @@ const better = (one: NetworkPlan | null, other: NetworkPlan | null): NetworkPlan
 
 function planned(ready: RequestNetwork, first: NetworkPlan, search: ProgrammeSearch): Programme {
   const kept = keptPlan(ready, search.incumbent);
-  const stable = search.previous ? replanned(ready, search.previous) : null;
+  const stable = search.previous ? replannedFrom(ready, search.previous) : null;
   const start = better(kept, stable ?? first) ?? first;
   const bound = networkBound(ready.network, ready.earliest, start.finish);
   if (stable) return described(ready, start, { bound, plans: 1 });
   const onBetter = (plan: NetworkPlan): void => search.onBetter?.(described(ready, plan, { bound, plans: 0 }));
   onBetter(start);
-  const improving = { first: start, bound, limit: search.limit ?? {}, seed: search.seed ?? 1, onBetter };
+  const improving = {
+    first: start,
+    bound,
+    limit: search.limit ?? {},
+    seed: search.seed ?? 1,
+    lots: ready.request.tasks.map(({ lotId }) => lotId),
+    onBetter,
+  };
   const { plan, plans } = improvedPlan(ready, improving);
   return described(ready, plan, { bound, plans });
 }

@@ -1,5 +1,6 @@
 import { serialResult, type BlockedNetwork, type SerialResult } from '#shared/programme/block-order';
 import { earliestTimes, type EarliestTimes } from '#shared/programme/earliest-times';
+import { networkPlan } from '#shared/programme/improved-plan';
 import { mirroredNetwork } from '#shared/programme/mirrored-network';
 import { daysUntil, networkOf } from '#shared/programme/network-of';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
@@ -33,6 +34,26 @@ export function latestFirst({ network, earliest }: RequestNetwork): number[] {
   return earliestTimes(mirroredNetwork(network, finish)).ends.map((end) => -end);
 }
 
+/**
+ * Orders worth trying first: by latest start, by earliest start, and lot after lot, each later by a share of the time all of them take, so that those who
+ * are busiest always have the next lot before them.
+ */
+function firstOrders(ready: RequestNetwork): number[][] {
+  const { request, earliest } = ready;
+  const late = latestFirst(ready);
+  const lots = [...new Set(request.tasks.map(({ lotId }) => lotId))];
+  const rank = new Map(lots.map((lot, at) => [lot, at]));
+  const works = ready.network.tasks.map(({ crews }) => Math.min(...crews.map(({ work }) => work)));
+  const beat = works.reduce((sum, work) => sum + work, 0) / lots.length;
+  const staggered = beats.map((share) =>
+    late.map((start, at) => start + share * beat * (rank.get(request.tasks[at].lotId) ?? 0)),
+  );
+  return [late, [...earliest.starts], ...staggered];
+}
+
+/** By how much a lot follows the one before it, in parts of the hands-on work of a lot. */
+const beats = [0.25, 1, 4];
+
 /** The first plan of a request, or why there is none. */
 export interface FirstResult {
   readonly ready: RequestNetwork;
@@ -44,11 +65,15 @@ export interface FirstResult {
 function firstOver(ready: RequestNetwork): FirstResult {
   if (ready.earliest.failed) {
     const { failed } = ready.earliest;
-    return { ready, endless: failed, result: { positions: null, failure: { task: failed.to, arc: failed } } };
+    return {
+      ready,
+      endless: failed,
+      result: { positions: null, failure: { task: failed.to, arc: failed, isHeld: false } },
+    };
   }
-  const orders = [latestFirst(ready), ready.earliest.starts, ready.earliest.ends];
-  let result = serialResult(ready, orders[0]);
-  for (const order of orders.slice(1)) if (!result.positions) result = serialResult(ready, order);
+  const results = firstOrders(ready).map((order) => serialResult(ready, order));
+  const finish = ({ positions }: SerialResult): number => (positions ? networkPlan(positions).finish : Infinity);
+  const result = results.reduce((best, one) => (finish(one) < finish(best) ? one : best));
   return { ready, result, endless: null };
 }
 

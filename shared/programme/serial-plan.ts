@@ -1,17 +1,23 @@
 import { Bookings } from '#shared/programme/bookings';
 import { firstPosition } from '#shared/programme/earliest-times';
-import { roomFrom } from '#shared/programme/place-room';
+import { holdStretch, roomFrom, type HoldLengths, type HoldState } from '#shared/programme/place-room';
 import type { TaskBlock } from '#shared/programme/task-blocks';
 import { pointOf, type Crew, type NetworkArc, type Position, type TaskNetwork } from '#shared/programme/task-network';
 
-/** Why a block found no place: an arc to a task that stands fast, an arc that put its tasks off again and again, or no hours for a task. */
+/**
+ * Why a block found no place: an arc to a task that stands fast, an arc that put its tasks off again and again, no hours for a task, or a place that somebody
+ * holds who has not left it yet.
+ */
 export interface PlanFailure {
   readonly task: number;
   readonly arc: NetworkArc | null;
+  readonly isHeld: boolean;
+  /** Whoever comes later to a place that is held longer than was thought. */
+  readonly holder?: number;
 }
 
 /** Tasks of one block may be put off so often before it is given up. */
-const mostRemovals = 3000;
+const mostRemovals = 1000;
 
 interface Bounds {
   start: number;
@@ -24,13 +30,17 @@ export class SerialPlan {
   failure: PlanFailure | null = null;
   private readonly bookings: Bookings;
   private readonly raised: Bounds[];
+  private isHeld = false;
+  private readonly holds: HoldState;
 
   constructor(
     private readonly network: TaskNetwork,
     private readonly preferred: readonly (readonly number[] | null)[] = [],
+    private readonly lengths: HoldLengths = new Map(),
   ) {
     this.bookings = new Bookings(network.people);
     this.positions = network.tasks.map(() => null);
+    this.holds = { positions: this.positions, lengths };
     this.raised = network.tasks.map(({ release: start }) => ({ start, end: -Infinity }));
     network.tasks.forEach(({ anchor }, at) => anchor && this.put(at, anchor));
   }
@@ -58,16 +68,19 @@ export class SerialPlan {
     for (const task of tasks) this.raised[task] = { start: this.network.tasks[task].release, end: -Infinity };
     for (let at = 0; at < tasks.length;) {
       const position = this.find(tasks[at]);
-      if (!position) return this.fail(tasks, { task: tasks[at], arc: null });
+      if (!position) return this.fail(tasks, { task: tasks[at], arc: null, isHeld: this.isHeld });
       const broken = this.brokenBy(tasks[at], position);
       if (broken.length === 0) {
         this.put(tasks[at], position);
+        const crowded = this.crowdedBy(tasks[at]);
+        if (crowded !== null) return this.fail(tasks, { task: tasks[at], arc: null, isHeld: true, holder: crowded });
         at += 1;
         continue;
       }
       removals += 1;
       const fast = broken.find((arc) => this.network.tasks[arc.to].anchor !== null || !tasks.includes(arc.to));
-      if (fast || removals > mostRemovals) return this.fail(tasks, { task: tasks[at], arc: fast ?? broken[0] });
+      if (fast || removals > mostRemovals)
+        return this.fail(tasks, { task: tasks[at], arc: fast ?? broken[0], isHeld: false });
       at = this.putOff(tasks, at, { position, broken });
     }
     return true;
@@ -120,6 +133,7 @@ export class SerialPlan {
   private find(task: number): Position | null {
     const bounds = this.boundsOf(task);
     const preferred = this.preferred[task];
+    this.isHeld = false;
     let best: Position | null = null;
     for (const crew of this.network.tasks[task].crews) {
       const found = this.findWith(crew, task, bounds);
@@ -138,17 +152,38 @@ export class SerialPlan {
       const { start, end } = found;
       const busy = this.bookings.busyUntil(crew.people, start, end);
       const free = busy ?? this.placesFree(task, found);
-      if (free === Infinity) return null;
+      if (free === Infinity) {
+        this.isHeld = true;
+        return null;
+      }
       if (free <= start) return { start, end, busyFrom: start, crew };
       from.start = free;
     }
   }
 
+  /** Who has to leave a place, or come to it later, since a hold that a task ends lasts longer than was thought; null where there is room. */
+  private crowdedBy(task: number): number | null {
+    for (const { place, hold } of this.network.closes[task]) {
+      const held = hold.from === task ? null : holdStretch(hold, this.positions, this.lengths);
+      if (!held || !this.lengths.has(hold)) continue;
+      const length = held.end - held.start;
+      if (roomFrom(place, hold, { start: held.start, length, ...this.holds }) === held.start) continue;
+      const later = place.holds.filter((other) => {
+        const start = this.positions[other.from]?.start ?? -Infinity;
+        return (
+          other !== hold && start >= held.start && start < held.end && this.network.tasks[other.from].anchor === null
+        );
+      });
+      return later.at(-1)?.from ?? null;
+    }
+    return null;
+  }
+
   private placesFree(task: number, { start, end }: Bounds): number {
     let free = start;
     for (const { place, hold } of this.network.opens[task]) {
-      const length = hold.until === task ? end - start : Infinity;
-      free = Math.max(free, roomFrom(place, hold, { start, length, positions: this.positions }));
+      const length = hold.until === task ? end - start : (this.lengths.get(hold) ?? Infinity);
+      free = Math.max(free, roomFrom(place, hold, { start, length, ...this.holds }));
     }
     return free;
   }

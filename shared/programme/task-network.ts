@@ -51,6 +51,12 @@ export interface NetworkPlace {
   readonly holds: readonly NetworkHold[];
 }
 
+/** A hold with the place it is of. */
+export interface HoldOfPlace {
+  readonly place: NetworkPlace;
+  readonly hold: NetworkHold;
+}
+
 /** A request in places and moments, seen forward or backward in time. */
 export interface TaskNetwork {
   readonly tasks: readonly NetworkTask[];
@@ -58,8 +64,9 @@ export interface TaskNetwork {
   readonly arcsTo: readonly (readonly NetworkArc[])[];
   readonly arcsFrom: readonly (readonly NetworkArc[])[];
   readonly places: readonly NetworkPlace[];
-  /** The holds a task opens, by place and hold. */
-  readonly opens: readonly (readonly { readonly place: NetworkPlace; readonly hold: NetworkHold }[])[];
+  /** The holds a task opens and those it ends. */
+  readonly opens: readonly (readonly HoldOfPlace[])[];
+  readonly closes: readonly (readonly HoldOfPlace[])[];
   readonly people: number;
 }
 
@@ -72,9 +79,14 @@ export function taskNetwork(parts: Pick<TaskNetwork, 'tasks' | 'arcs' | 'places'
     arcsTo[arc.to].push(arc);
     arcsFrom[arc.from].push(arc);
   }
-  const opens: { place: NetworkPlace; hold: NetworkHold }[][] = tasks.map(() => []);
-  for (const place of places) for (const hold of place.holds) opens[hold.from].push({ place, hold });
-  return { ...parts, arcsTo, arcsFrom, opens };
+  const opens: HoldOfPlace[][] = tasks.map(() => []);
+  const closes: HoldOfPlace[][] = tasks.map(() => []);
+  for (const place of places)
+    for (const hold of place.holds) {
+      opens[hold.from].push({ place, hold });
+      closes[hold.until].push({ place, hold });
+    }
+  return { ...parts, arcsTo, arcsFrom, opens, closes };
 }
 
 /** The moment of one point of a task that stands somewhere. */

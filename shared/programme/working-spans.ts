@@ -60,9 +60,11 @@ export class WorkingSpans {
     return this.momentOf(this.workedBy(start) + work);
   }
 
-  /** The latest moment of work from which so many minutes of work end at a moment or later: what starts before it ends too early. */
+  /** The first moment of work from which so many minutes of work end at a moment or later: what starts before it ends too early. */
   startFor(end: number, work: number): number {
-    const worked = this.workedBy(end) - work;
+    const by = this.workedBy(end);
+    // Nobody works up to a moment of the night: to end after it, a minute more has to be worked.
+    const worked = (this.momentOf(by) < end ? by + 1 : by) - work;
     return worked <= 0 ? -Infinity : this.startAt(this.momentOf(worked));
   }
 
