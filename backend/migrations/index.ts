@@ -9,6 +9,7 @@ import { jobs } from './0020-jobs';
 import { estimates } from './0030-estimates';
 import { variations } from './0031-variations';
 import { agreements } from './0040-agreements';
+import { programme } from './0045-programme';
 import { invoices } from './0050-invoices';
 
 /** Every step of the schema, in the order in which they are taken. A step that was released is never changed. */
@@ -23,5 +24,6 @@ export const migrations: readonly Migration[] = [
   estimates,
   variations,
   agreements,
+  programme,
   invoices,
 ];

@@ -1,8 +1,11 @@
 import { join } from 'node:path';
 import { demonstrationPeople } from '../../seeders/demonstration-people';
 import { seedDemonstration } from '../../seeders/seed-demonstration';
+import { takePaymentEvent } from '#shared/invoices/payments-endpoints';
 import { migrations } from '../migrations';
 import { openApp, type App } from './app';
+import { StandInPayments } from './platform/card-payments/stand-in-payments';
+import { StripePayments } from './platform/card-payments/stripe-payments';
 import { systemClock } from './platform/clock/clock';
 import { readConfig, type Config } from './platform/config/config';
 import { refuseUnsafeSettings } from './platform/database/unsafe-settings';
@@ -22,6 +25,22 @@ async function connectMail({ config, mailbox }: Platform): Promise<MailCatcher |
   const catcher = new MailCatcher(join(config.dataFolder, 'mail'));
   mailbox.connect(await catcher.start(), false);
   return catcher;
+}
+
+/** Cards are charged by the service whose keys are set; without any, on a machine nobody else reaches, one stands in for it. */
+async function connectCards({ config, cards, clock }: Platform): Promise<StandInPayments | undefined> {
+  if (config.stripe || config.publicUrl || config.seedsOnly) return undefined;
+  const events = `http://127.0.0.1:${config.port}${takePaymentEvent.path}`;
+  const standIn = new StandInPayments({
+    now: () => clock.now(),
+    deliver: async ({ bytes, signature }) => {
+      const headers = { 'content-type': 'application/json', [takePaymentEvent.signature]: signature };
+      await fetch(events, { method: 'POST', headers, body: new Uint8Array(bytes) });
+    },
+  });
+  const { secretKey, webhookSecret } = standIn;
+  cards.connect(new StripePayments({ secretKey, webhookSecret, at: await standIn.start() }));
+  return standIn;
 }
 
 /** What whoever started the server may tell its user. */
@@ -45,6 +64,7 @@ async function start(): Promise<() => Promise<void>> {
   const platform = openPlatform(config, systemClock, openLog(config.logLevel, logDestination(config.logFile)));
   await refuseUnsafeSettings(platform.database, config.mayBeUnsafe);
   const catcher = await connectMail(platform);
+  const standIn = await connectCards(platform);
   const app = openApp(platform, catcher);
   if (config.demonstrationPassword) await seedDemonstration(app, platform, config.demonstrationPassword);
   if (config.seedsOnly) return () => platform.database.close();
@@ -56,6 +76,7 @@ async function start(): Promise<() => Promise<void>> {
     clearInterval(sweeping);
     await stopListening(server, app.web);
     await platform.tasks.stop();
+    await standIn?.stop();
     await catcher?.stop();
     await platform.database.close();
   };

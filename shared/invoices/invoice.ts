@@ -1,3 +1,4 @@
+import type { SnapshotWorkshop } from '#shared/estimates/snapshot';
 import type { DocumentAllowanceOrCharge, InvoiceLine } from '#shared/invoices/invoice-lines';
 import type { InvoiceTotals } from '#shared/invoices/invoice-totals';
 import type { MinorUnits } from '#shared/money/decimal';
@@ -76,7 +77,7 @@ export interface FrozenInvoice {
   readonly dueOn: string | null;
   readonly terms: string;
   readonly currency: string;
-  readonly workshop: InvoiceWorkshop;
+  readonly workshop: SnapshotWorkshop;
   readonly seller: InvoiceSeller;
   readonly buyer: InvoiceBuyer;
   readonly account: PayeeAccount | null;
@@ -95,15 +96,4 @@ export interface FrozenInvoice {
   readonly totals: InvoiceTotals;
   readonly note: string;
   readonly closing: string;
-}
-
-/** The workshop as it stood over its papers when an invoice was issued. */
-export interface InvoiceWorkshop {
-  readonly name: string;
-  readonly addressLines: readonly string[];
-  readonly telephone: string;
-  readonly email: string;
-  readonly country: string;
-  readonly locale: string;
-  readonly paperSize: string;
 }

@@ -1,4 +1,6 @@
 import { join } from 'node:path';
+import { CardDesk } from './card-payments/card-desk';
+import { StripePayments } from './card-payments/stripe-payments';
 import type { Clock } from './clock/clock';
 import type { Config } from './config/config';
 import { Database } from './database/database';
@@ -13,5 +15,7 @@ export function openPlatform(config: Config, clock: Clock, log: Log): Platform {
   const database = new Database(config.databaseUrl);
   const tasks = new Tasks(database, clock, log);
   const files = new FileStore(database, join(config.dataFolder, 'files'), clock);
-  return { config, clock, log, database, tasks, files, mailbox: new Mailbox(config, tasks, files) };
+  const cards = new CardDesk();
+  if (config.stripe) cards.connect(new StripePayments(config.stripe));
+  return { config, clock, log, database, tasks, files, cards, mailbox: new Mailbox(config, tasks, files) };
 }

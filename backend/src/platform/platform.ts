@@ -1,3 +1,4 @@
+import type { CardDesk } from './card-payments/card-desk';
 import type { Clock } from './clock/clock';
 import type { Config } from './config/config';
 import type { Database } from './database/database';
@@ -15,4 +16,5 @@ export interface Platform {
   readonly tasks: Tasks;
   readonly files: FileStore;
   readonly mailbox: Mailbox;
+  readonly cards: CardDesk;
 }

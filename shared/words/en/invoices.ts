@@ -9,7 +9,7 @@ export const invoices = {
   'invoice-seller-vat-number':
     'Supplies within the Union and exports need your VAT number, with the letters of its country.',
   'invoice-seller-company-number':
-    'Outside the scope of VAT no VAT number is shown, so your company number is needed to say who you are.',
+    'Outside the scope of VAT no VAT number is shown, so your company number or tax number is needed to say who you are.',
   'invoice-buyer-number': 'Under reverse charge the client’s VAT number or company number is needed.',
   'invoice-buyer-vat-number': 'A supply within the Union needs the client’s VAT number.',
   'invoice-exemption-missing': 'Lines of category {code} charge no tax. Please say why.',
@@ -43,6 +43,8 @@ export const invoices = {
   'invoice-credit-over': 'Of invoice {number} no more than {left_minor} is left to credit.',
   'invoice-credit-nothing': 'Nothing of invoice {number} is left to credit.',
   'invoice-credit-kind': 'A credit note begins from the invoice it corrects.',
+
+  'invoice-credit-terms': 'Set off against what is open, or paid back.',
 
   // Payments
   'payment-foreign-currency': 'The books are kept in {currency}. Enter what the bank credited in {currency}.',
@@ -112,6 +114,8 @@ export const invoices = {
   'paper-invoice-column-unit-price': 'Unit price',
   'paper-invoice-column-tax': 'Tax',
   'paper-invoice-column-amount': 'Amount',
+  'paper-invoice-quantity':
+    '{quantity}{unit, select, C62 {} H87 { pc} EA {} SET { sets} HUR { h} LH { h} MIN { min} DAY { d} WEE { weeks} MTK { m²} MTR { m} CMK { cm²} FTK { ft²} FOT { ft} LTR { L} KGM { kg} GRM { g} KMT { km} LS { lump sum} D63 { booklets} P1 { %} DMQ { dm³} MTQ { m³} other {}}',
   'paper-invoice-price-for': '{price} for {quantity}',
   'paper-invoice-tax-of': '{rate_percent}',
   'paper-invoice-allowance': 'Less {reason}',

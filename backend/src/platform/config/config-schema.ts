@@ -18,6 +18,9 @@ export const configSchema = z
       .regex(/^smtps?:\/\//, 'must begin with smtp:// or smtps://')
       .optional(),
     MAIL_FROM: z.email().default('workshop@bolewright.invalid'),
+    /** Keys of the payment service; both, or neither for the one that stands in. */
+    STRIPE_SECRET_KEY: z.string().min(16).optional(),
+    STRIPE_WEBHOOK_SECRET: z.string().min(16).optional(),
     LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('info'),
     LOG_FILE: z.string().min(1).optional(),
     REQUESTS_PER_MINUTE: z.coerce.number().int().min(1).default(900),
@@ -25,6 +28,10 @@ export const configSchema = z
     SEED_ONLY: z.literal('yes').optional(),
     WEB_DIR: z.string().min(1).default('dist/web'),
     ALLOW_UNSAFE_DURABILITY: z.literal('yes').optional(),
+  })
+  .refine((env) => (env.STRIPE_SECRET_KEY === undefined) === (env.STRIPE_WEBHOOK_SECRET === undefined), {
+    message: 'needs STRIPE_SECRET_KEY beside it, and the other way round',
+    path: ['STRIPE_WEBHOOK_SECRET'],
   })
   .transform((env) => ({
     port: env.PORT,
@@ -36,6 +43,10 @@ export const configSchema = z
     publicUrl: env.PUBLIC_URL ? new URL(env.PUBLIC_URL) : undefined,
     smtpUrl: env.SMTP_URL,
     mailFrom: env.MAIL_FROM,
+    stripe:
+      env.STRIPE_SECRET_KEY === undefined || env.STRIPE_WEBHOOK_SECRET === undefined
+        ? undefined
+        : { secretKey: env.STRIPE_SECRET_KEY, webhookSecret: env.STRIPE_WEBHOOK_SECRET },
     logLevel: env.LOG_LEVEL,
     logFile: env.LOG_FILE,
     requestsPerMinute: env.REQUESTS_PER_MINUTE,

@@ -1,0 +1,80 @@
+import type { ClientActor } from '#shared/actor/client-actor';
+import type { ClientInvoice } from '#shared/client-page/client-invoices-endpoints';
+import type { ClientInvoiceSummary } from '#shared/client-page/client-overview-schema';
+import type { InvoicePaper } from '#shared/invoices/invoice-schema';
+import type { Checkout } from '#shared/invoices/payment-schema';
+import { Rejection } from '#shared/problems/rejection';
+import { presentCheckout, type Invoices, type InvoiceRow } from '../invoices';
+import type { FileAnswer } from '../platform/http/answer';
+import type { ClientInvoices } from './client-invoices';
+
+interface Parts {
+  readonly invoices: Pick<Invoices, 'reading' | 'checkouts'>;
+  readonly paysByCard: () => boolean;
+  /** Where a client comes back to from paying. */
+  readonly returnUrl: (checkoutId: string) => string;
+}
+
+const summaryOf = (row: InvoiceRow): ClientInvoiceSummary => ({
+  id: row.id,
+  jobId: row.jobId,
+  number: row.number ?? '',
+  issuedOn: row.issuedOn ?? '',
+  dueOn: row.dueOn ?? row.issuedOn ?? '',
+  due_minor: row.dueMinor,
+  open_minor: row.openMinor,
+  currency: row.currency,
+});
+
+/** What a client may see and pay: issued invoices of the job of their link, or all that are theirs. Drafts are not there. */
+export class ClientInvoiceService implements ClientInvoices {
+  constructor(private readonly parts: Parts) {}
+
+  readonly of = async (client: ClientActor): Promise<readonly ClientInvoiceSummary[]> =>
+    (await this.rows(client)).filter(({ kind }) => kind === 'invoice').map(summaryOf);
+
+  async list(client: ClientActor): Promise<ClientInvoice[]> {
+    const today = await this.parts.invoices.reading.today(client.workshopId);
+    return (await this.rows(client)).map((row) => ({
+      ...summaryOf(row),
+      kind: row.kind,
+      dueOn: row.dueOn,
+      isOverdue: row.openMinor > 0 && row.dueOn !== null && row.dueOn < today,
+      papers: row.xmlFileId === null ? ['invoice.pdf'] : ['invoice.pdf', 'invoice.xml'],
+      mayPayByCard:
+        this.parts.paysByCard() && row.openMinor > 0 && this.parts.invoices.checkouts.mayCharge(row.currency),
+    }));
+  }
+
+  async paper(client: ClientActor, invoiceId: string, paper: InvoicePaper): Promise<FileAnswer> {
+    await this.own(client, invoiceId);
+    return this.parts.invoices.reading.paper(client.workshopId, invoiceId, paper);
+  }
+
+  async begin(client: ClientActor, invoiceId: string): Promise<Checkout> {
+    const { openMinor } = await this.own(client, invoiceId);
+    const { accessId, name, email } = client;
+    const payer = { accessId, name, email, returnUrl: this.parts.returnUrl };
+    return presentCheckout(await this.parts.invoices.checkouts.begin(client.workshopId, invoiceId, payer), openMinor);
+  }
+
+  async ask(client: ClientActor, checkoutId: string): Promise<Checkout> {
+    const { checkouts } = this.parts.invoices;
+    const found = await checkouts.get(client.workshopId, checkoutId);
+    await this.own(client, found.invoiceId);
+    const checkout = await checkouts.ask(client.workshopId, checkoutId);
+    const { openMinor } = await this.own(client, found.invoiceId);
+    return presentCheckout(checkout, openMinor);
+  }
+
+  private rows({ workshopId, clientId, jobId }: ClientActor): Promise<InvoiceRow[]> {
+    return this.parts.invoices.reading.issuedTo(workshopId, { clientId, jobId });
+  }
+
+  private async own(client: ClientActor, invoiceId: string): Promise<InvoiceRow> {
+    const row = await this.parts.invoices.reading.row(client.workshopId, invoiceId);
+    const isTheirs = row.clientId === client.clientId && (client.jobId === null || client.jobId === row.jobId);
+    if (!isTheirs || row.state !== 'issued') throw new Rejection('not-found', 'problem-not-found');
+    return row;
+  }
+}

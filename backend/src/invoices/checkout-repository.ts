@@ -1,0 +1,57 @@
+import type { Database } from '../platform/database/database';
+import { WorkshopRows } from '../platform/database/workshop-rows';
+import { checkoutTable, type CheckoutRow } from './payment-model';
+
+/** Payments by card that were begun, and what the payment service told of them. */
+export class CheckoutRepository extends WorkshopRows<CheckoutRow> {
+  constructor(private readonly database: Database) {
+    super(checkoutTable(database));
+  }
+
+  /** Those of an invoice that may still be paid. */
+  openOf(workshopId: string, invoiceId: string): Promise<CheckoutRow[]> {
+    return this.list(workshopId, { where: { invoiceId, state: 'open' } });
+  }
+
+  /** The service knows nothing of workshops, so what it tells of is found by its own names, which are different in every row. */
+  async bySession(sessionId: string): Promise<CheckoutRow | undefined> {
+    return this.found('session_id = :name', sessionId);
+  }
+
+  async byIntent(intentId: string): Promise<CheckoutRow | undefined> {
+    return this.found('intent_id = :name', intentId);
+  }
+
+  async byId(id: string): Promise<CheckoutRow | undefined> {
+    return this.found('id = :name', id);
+  }
+
+  /** Whether an event is new; one who tells of it at the same moment is waited for. */
+  async isNew(event: { id: string; kind: string; content: string; receivedAt: Date }): Promise<boolean> {
+    const written = await this.database.execute(
+      `INSERT IGNORE INTO payment_events (id, kind, content, received_at) VALUES (:id, :kind, :content, :receivedAt)`,
+      event,
+    );
+    return written === 1;
+  }
+
+  async nameEvent(id: string, checkoutId: string): Promise<void> {
+    await this.database.execute('UPDATE payment_events SET checkout_id = :checkoutId WHERE id = :id', {
+      id,
+      checkoutId,
+    });
+  }
+
+  private async found(
+    condition: 'session_id = :name' | 'intent_id = :name' | 'id = :name',
+    name: string,
+  ): Promise<CheckoutRow | undefined> {
+    const statements = {
+      'session_id = :name': 'SELECT workshop_id AS workshopId, id FROM checkouts WHERE session_id = :name',
+      'intent_id = :name': 'SELECT workshop_id AS workshopId, id FROM checkouts WHERE intent_id = :name',
+      'id = :name': 'SELECT workshop_id AS workshopId, id FROM checkouts WHERE id = :name LIMIT 1',
+    };
+    const [row] = await this.database.select<{ workshopId: string; id: string }>(statements[condition], { name });
+    return row && this.find(row.workshopId, row.id);
+  }
+}

@@ -1,0 +1,98 @@
+import type { Accounts } from '../accounts';
+import type { Audit } from '../audit';
+import type { Jobs } from '../jobs';
+import { WorkshopRows } from '../platform/database/workshop-rows';
+import type { Route } from '../platform/http/mount';
+import type { Platform } from '../platform/platform';
+import { CheckoutRepository } from './checkout-repository';
+import { CheckoutService } from './checkout-service';
+import { DraftService } from './draft-service';
+import { InvoiceLetters } from './invoice-letters';
+import { InvoiceNumbers } from './invoice-numbers';
+import type { ContractOf, InvoiceParts } from './invoice-parts';
+import { InvoiceReading } from './invoice-reading';
+import { InvoiceRepository } from './invoice-repository';
+import { invoiceRoutes } from './invoice-routes';
+import { InvoiceSettingsService } from './invoice-settings-service';
+import { IssuingService } from './issuing-service';
+import { LedgerPapers } from './ledger-papers';
+import { LedgerService } from './ledger-service';
+import { reminderTable } from './payment-model';
+import { PaymentRepository } from './payment-repository';
+import { paymentRoutes } from './payment-routes';
+import { PaymentService } from './payment-service';
+import { RefundService } from './refund-service';
+import { SettlingService } from './settling-service';
+import { StageDayRepository } from './stage-day-repository';
+import { StageService } from './stage-service';
+
+export { presentCheckout, presentSummary } from './invoice-presenter';
+export type { ContractOf } from './invoice-parts';
+export type { CheckoutService, Payer } from './checkout-service';
+export type { InvoiceReading } from './invoice-reading';
+export type { InvoiceRow } from './invoice-model';
+
+export interface Invoices {
+  readonly drafts: DraftService;
+  readonly stages: StageService;
+  readonly issuing: IssuingService;
+  readonly recording: PaymentService;
+  readonly refunds: RefundService;
+  readonly checkouts: CheckoutService;
+  readonly reading: InvoiceReading;
+  readonly ledger: LedgerService;
+  readonly settings: InvoiceSettingsService;
+  readonly routes: readonly Route[];
+}
+
+/** What stands before invoices in the list of features, and what was agreed. */
+export interface InvoicesNeeds {
+  readonly accounts: Accounts;
+  readonly audit: Audit;
+  readonly jobs: Jobs;
+  readonly contract: ContractOf;
+}
+
+function partsOf({ database, clock, files, mailbox }: Platform, needs: InvoicesNeeds): InvoiceParts {
+  const { accounts, audit, jobs, contract } = needs;
+  const workshops = accounts.workshops;
+  return {
+    invoices: new InvoiceRepository(database),
+    payments: new PaymentRepository(database),
+    settings: new InvoiceSettingsService({ database, workshops, audit: audit.service }),
+    ...{ workshops, jobs, audit: audit.service, files, mailbox, clock, contract },
+  };
+}
+
+/** Invoices, credit notes, and everything that is paid, owed and given back. */
+export function openInvoices(platform: Platform, needs: InvoicesNeeds): Invoices {
+  const { database, cards } = platform;
+  const parts = partsOf(platform, needs);
+  const drafts = new DraftService(parts);
+  const settling = new SettlingService(parts);
+  const stages = new StageService({ ...parts, drafts, days: new StageDayRepository(database) });
+  const issuing = new IssuingService({ ...parts, stages, settling, numbers: new InvoiceNumbers(database) });
+  const ledger = new LedgerService(parts);
+  const reading = new InvoiceReading({ ...parts, issuing, ledger });
+  const letters = new InvoiceLetters({ ...parts, reminders: new WorkshopRows(reminderTable(database)) });
+  const recording = new PaymentService({ ...parts, settling });
+  const rows = new CheckoutRepository(database);
+  const refunds = new RefundService({ ...parts, recording, settling, cards, checkouts: rows });
+  const checkouts = new CheckoutService({
+    ...parts,
+    ...{ database, checkouts: rows, cards, recording, refunds, settling, letters },
+  });
+  const routes = [
+    ...invoiceRoutes({ drafts, stages, issuing, reading, settings: parts.settings, letters }),
+    ...paymentRoutes({
+      recording,
+      refunds,
+      checkouts,
+      ledger,
+      papers: new LedgerPapers(parts, ledger),
+      reading,
+      letters,
+    }),
+  ];
+  return { drafts, stages, issuing, recording, refunds, checkouts, reading, ledger, settings: parts.settings, routes };
+}

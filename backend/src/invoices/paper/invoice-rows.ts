@@ -1,0 +1,129 @@
+import { exemptionOf } from '#shared/invoices/exemption-of';
+import type { FrozenInvoice } from '#shared/invoices/invoice';
+import type { AllowanceOrCharge } from '#shared/invoices/invoice-lines';
+import { allowanceAmount } from '#shared/invoices/invoice-totals';
+import { currencyDigits } from '#shared/money/currency-digits';
+import { D, type MinorUnits } from '#shared/money/decimal';
+import type { TaxCode, TaxRate } from '#shared/money/tax-by-category';
+import { textStyles, type PaperWords, type TableColumn, type TableRow } from '../../documents';
+
+/** An issued invoice and the words its paper is set in. */
+export interface InvoiceOnPaper {
+  readonly invoice: FrozenInvoice;
+  readonly words: PaperWords;
+}
+
+/** A price may have more decimals than its currency; all of them are shown. */
+function priceText({ invoice }: InvoiceOnPaper, price: string): string {
+  const digits = currencyDigits(invoice.currency);
+  const settings = { minimumFractionDigits: digits, maximumFractionDigits: Math.max(6, digits) };
+  return new Intl.NumberFormat(invoice.workshop.locale, settings).format(price as `${number}`);
+}
+
+const quantityText = ({ words }: InvoiceOnPaper, quantity: string, unit: string): string =>
+  words.say('paper-invoice-quantity', { quantity: words.figure('number', Number(quantity)), unit });
+
+const taxText = ({ words }: InvoiceOnPaper, { code, percent }: TaxRate): string =>
+  Number(percent) > 0 ? words.say('paper-invoice-tax-of', { rate_percent: Number(percent) }) : code;
+
+/** What comes off or on, said in small print under its line, and as a row of its own for the document. */
+function allowanceText({ words }: InvoiceOnPaper, one: AllowanceOrCharge): string {
+  const reason = `${one.reason}: ${words.money(allowanceAmount(one))}`;
+  return words.say(one.charge ? 'paper-invoice-charge' : 'paper-invoice-allowance', { reason });
+}
+
+function lineRow(paper: InvoiceOnPaper, place: number): TableRow {
+  const { invoice, words } = paper;
+  const line = invoice.lines[place];
+  const price = priceText(paper, line.price);
+  const isForOne = new D(line.baseQuantity).equals(1);
+  const quantity = quantityText(paper, line.baseQuantity, line.unit);
+  const note = [line.description, ...line.allowancesCharges.map((one) => allowanceText(paper, one))];
+  return {
+    cells: [
+      { text: line.name, note: note.filter((text) => text.trim() !== '').join('\n'), isRowHead: true },
+      { text: quantityText(paper, line.quantity, line.unit) },
+      { text: isForOne ? price : words.say('paper-invoice-price-for', { price, quantity }) },
+      { text: taxText(paper, line.tax) },
+      { text: words.money(invoice.totals.lineNets_minor[place]) },
+    ],
+    above: 'hair',
+  };
+}
+
+export const invoiceColumns = ({ words }: InvoiceOnPaper): TableColumn[] => [
+  { head: words.say('paper-column-work'), width: 'rest' },
+  { head: words.say('paper-invoice-column-quantity'), width: 'fit', align: 'right' },
+  { head: words.say('paper-invoice-column-unit-price'), width: 'fit', align: 'right' },
+  { head: words.say('paper-invoice-column-tax'), width: 'fit', align: 'right' },
+  { head: words.say('paper-invoice-column-amount'), width: 'fit', align: 'right' },
+];
+
+export const lineRows = (paper: InvoiceOnPaper): TableRow[] =>
+  paper.invoice.lines.map((_, place) => lineRow(paper, place));
+
+interface Sum {
+  readonly text: string;
+  readonly note?: string;
+  readonly amount: string;
+  readonly look?: 'plain' | 'strong' | 'sum';
+}
+
+function sumRow({ text, note, amount, look = 'plain' }: Sum): TableRow {
+  const style = { plain: textStyles.body, strong: textStyles.strong, sum: textStyles.sum }[look];
+  const above = { plain: 'none', strong: 'hair', sum: 'gold' } as const;
+  const cells = [
+    { text, style, span: 4, isRowHead: true, ...(note ? { note } : {}) },
+    { text: amount, style },
+  ];
+  return { cells, above: above[look], padding_pt: look === 'plain' ? 1.5 : 4 };
+}
+
+const exemptionWords = {
+  E: 'exemption-E',
+  AE: 'exemption-AE',
+  K: 'exemption-K',
+  G: 'exemption-G',
+  O: 'exemption-O',
+} as const;
+
+/** Why a category charges nothing, in the words entered or in ours. */
+function exemptionText({ invoice, words }: InvoiceOnPaper, code: TaxCode): string {
+  const exemption = exemptionOf(code, invoice.exemptions);
+  if (!exemption) return '';
+  return exemption.reason || words.say(exemptionWords[code as keyof typeof exemptionWords]);
+}
+
+const taxSums = (paper: InvoiceOnPaper): Sum[] =>
+  paper.invoice.totals.categories.map(({ tax, net_minor, tax_minor }) => ({
+    text: paper.words.say(Number(tax.percent) > 0 ? 'paper-invoice-tax-sum' : 'paper-invoice-untaxed', {
+      ...{ code: tax.code, rate_percent: Number(tax.percent), net_minor },
+    }),
+    note: exemptionText(paper, tax.code),
+    amount: paper.words.money(tax_minor),
+  }));
+
+/** The sums under the lines, in the order in which they are worked. */
+export function sumRows(paper: InvoiceOnPaper): TableRow[] {
+  const { invoice, words } = paper;
+  const { totals, allowancesCharges, prepaid_minor, rounding_minor, kind } = invoice;
+  const single = (text: string, amount_minor: MinorUnits, look: Sum['look'] = 'plain'): Sum => ({
+    text,
+    amount: words.money(amount_minor),
+    look,
+  });
+  const bears = allowancesCharges.length > 0;
+  const sums = [
+    ...(bears ? [single(words.say('paper-invoice-lines-sum'), totals.lineSum_minor, 'strong')] : []),
+    ...allowancesCharges.map((one) =>
+      single(allowanceText(paper, one), one.charge ? allowanceAmount(one) : -allowanceAmount(one)),
+    ),
+    single(words.say('paper-invoice-net'), totals.net_minor, 'strong'),
+    ...taxSums(paper),
+    single(words.say('paper-invoice-gross'), totals.gross_minor, 'strong'),
+    ...(prepaid_minor === 0 ? [] : [single(words.say('paper-invoice-prepaid'), -prepaid_minor)]),
+    ...(rounding_minor === 0 ? [] : [single(words.say('paper-invoice-rounding'), rounding_minor)]),
+    single(words.say('paper-invoice-due-sum', { kind }), totals.due_minor, 'sum'),
+  ];
+  return sums.map(sumRow).map((row, place) => ({ ...row, keepsWithNext: place < sums.length - 1 }));
+}

@@ -1,0 +1,107 @@
+import type { SnapshotWorkshop } from '#shared/estimates/snapshot';
+import type { Statement } from '#shared/invoices/payment-schema';
+import {
+  addressBlock,
+  finishedPaper,
+  letterheadBlock,
+  paperWords,
+  printableLogo,
+  tableBlock,
+  textBlock,
+  textStyles,
+  type Block,
+  type PaperWords,
+  type Pdf,
+  type TableColumn,
+  type TableRow,
+} from '../../documents';
+
+/** What a statement is set from. */
+export interface StatementOnPaper {
+  readonly workshop: SnapshotWorkshop;
+  readonly logo: Buffer | null;
+  readonly address: readonly string[];
+  readonly statement: Statement;
+  /** Instant in UTC (ISO 8601), and its day in the workshop's zone. */
+  readonly madeAt: string;
+  readonly madeOn: string;
+}
+
+const ledgerWords = {
+  invoice: 'ledger-invoice',
+  'credit-note': 'ledger-credit-note',
+  payment: 'ledger-payment',
+  refund: 'ledger-refund',
+  'write-off': 'ledger-write-off',
+} as const;
+
+const columns = ({ say }: PaperWords): TableColumn[] => [
+  { head: say('paper-statement-column-day'), width: 'fit' },
+  { head: say('paper-statement-column-what'), width: 'rest' },
+  { head: say('paper-statement-column-amount'), width: 'fit', align: 'right' },
+  { head: say('paper-statement-column-balance'), width: 'fit', align: 'right' },
+];
+
+const balanceRow = (text: string, amount: string, above: TableRow['above']): TableRow => ({
+  cells: [
+    { text, span: 3, isRowHead: true, style: textStyles.strong },
+    { text: amount, style: textStyles.strong },
+  ],
+  above,
+});
+
+function rows({ statement }: StatementOnPaper, words: PaperWords): TableRow[] {
+  const { say, money, day } = words;
+  const { opening_minor, closing_minor, from, to, lines } = statement;
+  return [
+    balanceRow(say('paper-statement-opening', { day: day(from) }), money(opening_minor), 'hair'),
+    ...lines.map((line): TableRow => ({
+      cells: [
+        { text: day(line.day) },
+        { text: say(ledgerWords[line.kind], { number: line.number }), isRowHead: true },
+        { text: money(line.amount_minor) },
+        { text: money(line.balance_minor) },
+      ],
+      above: 'hair',
+    })),
+    balanceRow(say('paper-statement-closing', { day: day(to) }), money(closing_minor), 'gold'),
+  ];
+}
+
+function blocks(pdf: Pdf, paper: StatementOnPaper, words: PaperWords): Block[] {
+  const { statement, workshop, logo, address, madeOn } = paper;
+  const { clientName, from, to } = statement;
+  return [
+    letterheadBlock({ workshop, logo: printableLogo(pdf, logo), words }),
+    addressBlock(pdf, {
+      address: [clientName, ...address],
+      particulars: [[words.say('paper-date'), words.day(madeOn)]],
+    }),
+    textBlock(
+      pdf,
+      words.say('paper-statement-title', { client: clientName, from: words.day(from), to: words.day(to) }),
+      { style: textStyles.title, tag: 'H1' },
+    ),
+    tableBlock(pdf, columns(words), rows(paper, words)),
+  ];
+}
+
+/** The account of a client on paper. */
+export function statementPaper(paper: StatementOnPaper): Promise<Buffer> {
+  const words = paperWords(paper.workshop);
+  const { clientName, from, to } = paper.statement;
+  const title = words.say('paper-statement-title', { client: clientName, from: words.day(from), to: words.day(to) });
+  return finishedPaper({
+    facts: {
+      ...{ title, author: paper.workshop.name, subject: words.say('paper-statement'), language: words.language },
+      size: paper.workshop.paperSize === 'Letter' ? 'Letter' : 'A4',
+      madeAt: paper.madeAt,
+    },
+    feet: {
+      head: title,
+      foot: `${paper.workshop.name} · ${title}`,
+      pageOf: (page, pages) => words.say('paper-page-of', { page, pages }),
+    },
+    blocks: (pdf) => blocks(pdf, paper, words),
+  });
+}

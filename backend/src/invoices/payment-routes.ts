@@ -1,0 +1,71 @@
+import {
+  readJournal,
+  readJournalFile,
+  readOwed,
+  readStatement,
+  readStatementPaper,
+  remindOfInvoice,
+} from '#shared/invoices/owed-endpoints';
+import {
+  askCheckout,
+  listPayments,
+  recordPayment,
+  refundPayment,
+  sharePayment,
+  takePaymentEvent,
+  writeOff,
+} from '#shared/invoices/payments-endpoints';
+import { mount, type Route } from '../platform/http/mount';
+import type { CheckoutService } from './checkout-service';
+import type { InvoiceLetters } from './invoice-letters';
+import { presentCheckout } from './invoice-presenter';
+import type { InvoiceReading } from './invoice-reading';
+import type { LedgerPapers } from './ledger-papers';
+import type { LedgerService } from './ledger-service';
+import type { PaymentService } from './payment-service';
+import type { RefundService } from './refund-service';
+
+interface Parts {
+  readonly recording: PaymentService;
+  readonly refunds: RefundService;
+  readonly checkouts: CheckoutService;
+  readonly ledger: LedgerService;
+  readonly papers: LedgerPapers;
+  readonly reading: InvoiceReading;
+  readonly letters: InvoiceLetters;
+}
+
+const owedRoutes = ({ ledger, papers, letters }: Parts): Route[] => [
+  mount(readOwed, ({ actor }) => ledger.owed(actor.workshopId)),
+  mount(readStatement, ({ actor, params, query }) => ledger.statement(actor.workshopId, params.clientId, query)),
+  mount(readStatementPaper, ({ actor, params, query }) => papers.statement(actor.workshopId, params.clientId, query)),
+  mount(readJournal, ({ actor, query }) => ledger.journal(actor.workshopId, query)),
+  mount(readJournalFile, ({ actor, params, query }) => papers.journal(actor.workshopId, params.form, query)),
+  mount(remindOfInvoice, ({ actor, params, body }) => letters.remind(actor, params.invoiceId, body.note)),
+];
+
+export const paymentRoutes = (parts: Parts): Route[] => {
+  const { recording, refunds, checkouts, reading } = parts;
+  return [
+    mount(listPayments, ({ actor, query }) => reading.payments(actor.workshopId, query)),
+    mount(recordPayment, async ({ actor, body }) => reading.payment(await recording.record(actor, body))),
+    mount(sharePayment, async ({ actor, params, body }) =>
+      reading.payment(await recording.share(actor, params.paymentId, body)),
+    ),
+    mount(refundPayment, async ({ actor, params, body }) =>
+      reading.payment(await refunds.refund(actor, params.paymentId, body)),
+    ),
+    mount(writeOff, async ({ actor, params, body }) =>
+      reading.read(await recording.writeOff(actor, params.invoiceId, body)),
+    ),
+    mount(askCheckout, async ({ actor, params }) => {
+      const checkout = await checkouts.ask(actor.workshopId, params.checkoutId);
+      const { open_minor } = await reading.get(actor.workshopId, checkout.invoiceId);
+      return presentCheckout(checkout, open_minor);
+    }),
+    mount(takePaymentEvent, async ({ signed }) => {
+      if (signed) await checkouts.take(signed);
+    }),
+    ...owedRoutes(parts),
+  ];
+};

@@ -1,0 +1,54 @@
+import type { ContractPart } from '#shared/agreements/contract';
+import type { InvoiceBuyer } from '#shared/invoices/invoice';
+import type { StageClaim } from '#shared/invoices/stage-claim';
+import type { StageLineNames } from '#shared/invoices/stage-lines';
+import { cumulativePercents } from '#shared/money/cumulative-parts';
+import { D } from '#shared/money/decimal';
+import type { PaperWords } from '../documents';
+import type { ClientRow } from '../jobs';
+
+/** The name of the planned stage that a claim is the whole of, if there is one. */
+function plannedName(part: ContractPart, claim: StageClaim): string | undefined {
+  if (claim.of !== 'work') return undefined;
+  const reached = cumulativePercents(part.plan.stages_percent);
+  const place = reached.findIndex((end) => end.equals(claim.to_percent));
+  const start = place > 0 ? reached[place - 1] : new D(0);
+  return place >= 0 && start.equals(claim.from_percent) ? (part.stageNames[place] ?? '') : undefined;
+}
+
+const singleNames = {
+  deposit: 'invoice-line-deposit',
+  'first-release': 'invoice-line-first-release',
+  'second-release': 'invoice-line-second-release',
+} as const;
+
+function workName(words: PaperWords, part: ContractPart, claim: StageClaim): string {
+  const values = { number: part.number, title: part.title };
+  if (claim.of !== 'work') return words.say(singleNames[claim.of], values);
+  const planned = plannedName(part, claim);
+  if (planned === undefined) {
+    const [from_percent, to_percent] = [Number(claim.from_percent), Number(claim.to_percent)];
+    return words.say('invoice-line-work', { ...values, from_percent, to_percent });
+  }
+  return words.say('invoice-line-stage', { ...values, stage: planned || words.say('invoice-line-whole-stage') });
+}
+
+/** A line is as long as a line of an invoice may be. */
+const shortened = (text: string): string => (text.length <= 160 ? text : `${text.slice(0, 159)}…`);
+
+/** What the lines of a claim are called on the invoice. */
+export const stageNames = (words: PaperWords, part: ContractPart, claim: StageClaim): StageLineNames => ({
+  work: shortened(workName(words, part, claim)),
+  recovered: words.say('invoice-line-recovered'),
+  retained: words.say('invoice-line-retained'),
+});
+
+/** The buyer as the client's entry has it; of what country they are nobody has said, so it is the workshop's own. */
+export function buyerOf(client: ClientRow, country: string): InvoiceBuyer {
+  const registration = client.taxRegistration.replace(/\s/g, '').toUpperCase();
+  const isVatId = /^[A-Z]{2}[0-9A-Z]{2,18}$/.test(registration);
+  return {
+    ...{ name: client.name, contact: client.contact, address: client.address, country, email: client.email },
+    ...{ vatId: isVatId ? registration : '', companyNumber: isVatId ? '' : client.taxRegistration, reference: '' },
+  };
+}
