@@ -46,7 +46,7 @@ export function openApp(platform: Platform, catcher?: MailCatcher): App {
     papers: new PaperMaking(),
   });
   const agreements = openAgreements(platform, { accounts, audit, jobs, estimates });
-  const clientPage = openClientPage(platform, { accounts, estimates, agreements, invoices: noInvoices });
+  const clientPage = openClientPage({ accounts, estimates, agreements, invoices: noInvoices });
   const features = [audit, accounts, rateCards, jobs, estimates, agreements, clientPage];
   const routes = features.flatMap((feature) => feature.routes);
   const web = openWebServer(platform, {

@@ -31,6 +31,8 @@ export type { WorkshopService } from './workshop-service';
 /** What other features and the start data may ask of this one. */
 export interface Accounts {
   readonly identities: Identities;
+  /** Holds off guessing: of passwords, and of clients' links. */
+  readonly throttle: LoginThrottleService;
   readonly workshops: WorkshopService;
   readonly people: PeopleService;
   readonly newcomers: NewcomerService;
@@ -77,6 +79,7 @@ export function openAccounts(platform: Platform, audit: Audit): Accounts {
   const people = new PeopleService(base);
   return {
     identities,
+    throttle,
     workshops,
     people,
     newcomers,

@@ -1,5 +1,5 @@
 /** What failed sign-ins are counted by. */
-export type LoginScope = 'pair' | 'address' | 'account';
+export type LoginScope = 'pair' | 'address' | 'account' | 'link';
 
 /** Failed sign-ins of one scope, and when the last was. */
 export interface LoginCount {
@@ -8,7 +8,7 @@ export interface LoginCount {
 }
 
 /** How many failures are free, before waits of 1, 2, 4 … seconds begin. */
-const free: Readonly<Record<LoginScope, number>> = { pair: 5, address: 30, account: 60 };
+const free: Readonly<Record<LoginScope, number>> = { pair: 5, address: 30, account: 60, link: 10 };
 const longestWait_milliseconds = 15 * 60_000;
 
 /** Failures are remembered for an hour after the last one. */

@@ -1,5 +1,6 @@
 import { createHash } from 'node:crypto';
 import { Rejection } from '#shared/problems/rejection';
+import type { WordCode } from '#shared/words/word-code';
 import type { Clock } from '../platform/clock/clock';
 import type { LoginAttemptRepository } from './login-attempt-repository';
 import {
@@ -28,14 +29,18 @@ export class LoginThrottleService {
 
   /** Counts an attempt before it is tried, so that many at once are no way around; refuses one that comes too soon. */
   async begin(email: string, address: string): Promise<void> {
-    const now = this.clock.now();
-    const wait_milliseconds = await this.attempts.apart(() => this.counted(email, address, now));
-    if (wait_milliseconds === 0) return;
-    const retryAfter_seconds = Math.ceil(wait_milliseconds / 1_000);
-    throw new Rejection('too-many', 'sign-in-too-often', {
-      values: { seconds: retryAfter_seconds },
-      retryAfter_seconds,
-    });
+    await this.count('sign-in-too-often', () => this.scopesOf(email, address));
+  }
+
+  /** The same for the opening of a client's link, by address alone: a link that fits nothing is a guess. */
+  async beginLink(address: string): Promise<void> {
+    const scopes = new Map<string, LoginScope>([[markOf('link', address), 'link']]);
+    await this.count('visit-too-often', () => Promise.resolve(scopes));
+  }
+
+  /** The link opened something: it is not counted. */
+  async linkOpened(address: string): Promise<void> {
+    await this.attempts.apart(() => this.attempts.giveBack(markOf('link', address)));
   }
 
   /** The attempt was right: the person's own counts are cleared, the address only gets this one back. */
@@ -55,9 +60,16 @@ export class LoginThrottleService {
     await this.attempts.sweep({ counts: before(loginMemory_milliseconds), trust: before(trust_milliseconds) });
   }
 
+  private async count(code: WordCode, scopesOf: () => Promise<Map<string, LoginScope>>): Promise<void> {
+    const now = this.clock.now();
+    const wait_milliseconds = await this.attempts.apart(async () => this.counted(await scopesOf(), now));
+    if (wait_milliseconds === 0) return;
+    const retryAfter_seconds = Math.ceil(wait_milliseconds / 1_000);
+    throw new Rejection('too-many', code, { values: { seconds: retryAfter_seconds }, retryAfter_seconds });
+  }
+
   /** How long is still to be waited; where nothing is, the attempt is counted. */
-  private async counted(email: string, address: string, now: Date): Promise<number> {
-    const scopes = await this.scopesOf(email, address);
+  private async counted(scopes: ReadonlyMap<string, LoginScope>, now: Date): Promise<number> {
     const counts = await this.attempts.hold([...scopes.keys()], now);
     const known = [...scopes].map(([mark, scope]) => ({ mark, scope, count: counts.get(mark) as LoginCount }));
     const wait = Math.max(...known.map(({ scope, count }) => loginWait_milliseconds(scope, count, now)));

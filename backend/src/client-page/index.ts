@@ -2,11 +2,9 @@ import type { Accounts } from '../accounts';
 import type { Agreements } from '../agreements';
 import type { Estimates } from '../estimates';
 import type { Route } from '../platform/http/mount';
-import type { Platform } from '../platform/platform';
 import type { ClientInvoices } from './client-invoices';
 import { clientPageRoutes } from './client-page-routes';
 import { ClientPageService } from './client-page-service';
-import { GuessLimit } from './guess-limit';
 import { visitRoutes } from './visit-routes';
 
 export { noInvoices, type ClientInvoices } from './client-invoices';
@@ -24,8 +22,8 @@ export interface ClientPageNeeds {
 }
 
 /** Everything a client may call. */
-export function openClientPage({ clock }: Platform, needs: ClientPageNeeds): ClientPage {
+export function openClientPage(needs: ClientPageNeeds): ClientPage {
   const pages = new ClientPageService(needs);
   const { agreements } = needs;
-  return { routes: [...visitRoutes(agreements, new GuessLimit(clock)), ...clientPageRoutes(pages, agreements)] };
+  return { routes: [...visitRoutes(agreements, needs.accounts.throttle), ...clientPageRoutes(pages, agreements)] };
 }
