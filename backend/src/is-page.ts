@@ -21,6 +21,7 @@ const places = new Set([
   'invoices',
   'leaf',
   'history',
+  'letters',
   'client',
 ]);
 

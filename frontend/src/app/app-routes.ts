@@ -34,6 +34,11 @@ export const appRoutes: Routes = [
         loadChildren: () => import('./jobs/jobs-routes').then(({ clientsRoutes }) => clientsRoutes),
       },
       {
+        path: 'letters',
+        canMatch: [roleGuard('owner', 'office')],
+        loadChildren: () => import('./agreements/agreements-routes').then(({ lettersRoutes }) => lettersRoutes),
+      },
+      {
         path: '**',
         title: $localize`Nothing here`,
         loadComponent: () => import('./shell/not-found-page').then(({ NotFoundPage }) => NotFoundPage),

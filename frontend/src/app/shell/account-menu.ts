@@ -26,6 +26,7 @@ export class AccountMenu {
     (this.who()?.memberships ?? []).filter(({ id }) => id !== this.who()?.membership?.id),
   );
   protected readonly isOwner = computed(() => this.session.may('owner'));
+  protected readonly writesLetters = computed(() => this.session.may('owner', 'office'));
   protected readonly choice = this.theme.choice;
   protected readonly choices: readonly { readonly choice: ThemeChoice; readonly label: string }[] = [
     { choice: 'system', label: $localize`As the device has it` },
