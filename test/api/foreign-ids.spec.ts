@@ -1,0 +1,105 @@
+import type { Endpoint } from '#shared/actor/endpoint';
+import { roles } from '#shared/actor/role';
+import { endpoints } from '#shared/endpoints';
+import { allRows } from './rows/all-rows';
+import { sampleEstimate } from './sample-estimate';
+import { cardInForce } from './sample-card';
+import { canary, startApi, type Api } from './start-api';
+
+/**
+ * Another workshop's ids where the matrix does not look: in every entry of a body in turn, and in every query. Nothing of theirs comes
+ * back, and nothing of theirs changes (ASVS 8.2.2, 8.4.1).
+ */
+let api: Api;
+beforeAll(async () => {
+  api = await startApi();
+}, 60_000);
+afterAll(() => api.stop());
+
+type Path = readonly (string | number)[];
+type Node = Record<string | number, unknown>;
+
+const isId = (value: unknown): boolean => typeof value === 'string' && /^[0-9a-f]{8}-[0-9a-f-]{27}$/.test(value);
+
+function idsIn(value: unknown, path: Path = []): Path[] {
+  if (isId(value)) return [path];
+  if (value === null || typeof value !== 'object') return [];
+  const entries = Array.isArray(value) ? [...value.entries()] : Object.entries(value);
+  return entries.flatMap(([name, inner]) => idsIn(inner, [...path, name]));
+}
+
+const at = (value: unknown, path: Path): unknown =>
+  path.reduce<unknown>((inner, name) => (inner as Node | undefined)?.[name], value);
+
+function withId(body: unknown, path: Path, id: unknown): unknown {
+  const copy = structuredClone(body);
+  (at(copy, path.slice(0, -1)) as Node)[path.at(-1)!] = id;
+  return copy;
+}
+
+/** What the other workshop has, in every table that belongs to workshops. */
+async function theirRows(): Promise<unknown> {
+  const tables = await api.platform.database.select<{ name: string }>(
+    "SELECT table_name AS name FROM information_schema.columns WHERE table_schema = DATABASE() AND column_name = 'workshop_id' AND table_name NOT IN ('sessions', 'tasks') ORDER BY name",
+  );
+  const counts: unknown[] = [];
+  for (const { name } of tables) {
+    const text = 'SELECT COUNT(*) AS rows_found FROM ' + name + ' WHERE workshop_id = :id';
+    counts.push([name, await api.platform.database.select(text, { id: api.theirs.id })]);
+  }
+  return counts;
+}
+
+const mayCall = ({ callers }: Endpoint) => roles.find((role) => typeof callers !== 'string' && callers.includes(role))!;
+const ofRoles = endpoints.filter(({ callers }) => typeof callers !== 'string');
+const withBody = ofRoles.filter(({ body, upload }) => body && !upload);
+
+test('in a body', async () => {
+  let tried = 0;
+  for (const endpoint of withBody) {
+    const person = api.ours.people[mayCall(endpoint)];
+    const row = allRows[endpoint.name]!;
+    const [ours, theirs] = [await row.prepare(api.ours, api, person), await row.prepare(api.theirs, api, person)];
+    const before = await theirRows();
+    for (const path of idsIn(ours.body)) {
+      tried += 1;
+      const body = withId(ours.body, path, at(theirs.body, path) ?? at(theirs.params, ['estimateId']));
+      const response = await person.visitor.call(endpoint, { ...ours, body });
+      expect([endpoint.name, path, response.status < 500]).toEqual([endpoint.name, path, true]);
+      expect(response.text).not.toContain(canary);
+    }
+    expect([endpoint.name, await theirRows()]).toEqual([endpoint.name, before]);
+  }
+  expect(tried).toBeGreaterThan(5);
+}, 120_000);
+
+test('in a query', async () => {
+  const { jobId, estimateId, memberId } = await sampleEstimate(api.theirs);
+  const { clientId } = await api.app.jobs.job(api.theirs.id, jobId);
+  const ids = [jobId, estimateId, memberId, clientId, (await cardInForce(api.theirs)).id];
+  let tried = 0;
+  for (const endpoint of ofRoles.filter(({ query }) => query !== undefined)) {
+    const person = api.ours.people[mayCall(endpoint)];
+    const parts = await allRows[endpoint.name]!.prepare(api.ours, api, person);
+    const takesIds = Object.entries(endpoint.query!.shape).filter(([, field]) => isTakingIds(field, jobId));
+    for (const [name] of takesIds) {
+      for (const id of ids) {
+        tried += 1;
+        const response = await person.visitor.call(endpoint, { ...parts, query: { [name]: id } });
+        expect(response.text).not.toContain(canary);
+        const { items } = response.body as { items?: unknown[] };
+        expect([endpoint.name, name, response.status === 404 || items?.length === 0]).toEqual([
+          endpoint.name,
+          name,
+          true,
+        ]);
+      }
+    }
+  }
+  expect(tried).toBeGreaterThan(10);
+}, 60_000);
+
+const isTakingIds = (field: unknown, id: string): boolean => {
+  const { safeParse } = field as { safeParse(value: unknown): { success: boolean } };
+  return safeParse(id).success && !safeParse('x').success;
+};
