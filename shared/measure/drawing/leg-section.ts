@@ -58,7 +58,7 @@ export function legCutParts(shape: StraightLegShape): number[] {
 }
 
 /** The plan of a straight leg, its cuts let into the head; the larger of head and foot as the outline, the other within it; in mm. */
-export function sectionView(shape: StraightLegShape): DrawingView {
+export function legSection(shape: StraightLegShape): DrawingView {
   const { section, top_mm, foot_mm, fluting } = shape;
   const half_mm = Math.max(top_mm, foot_mm) / 2;
   const reach_mm = half_mm + (fluting?.cut === 'reeds' ? fluting.depth_mm : 0);

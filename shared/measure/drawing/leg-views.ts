@@ -1,7 +1,7 @@
 import { cutEdges, cutsRound, edgesInFront } from '#shared/measure/drawing/cut-spans';
 import type { DrawingPath, DrawingPoint, DrawingView } from '#shared/measure/drawing/drawing';
 import { boxAround, dimension, madeView } from '#shared/measure/drawing/made-view';
-import { legCutParts, octagonPart, sectionView } from '#shared/measure/drawing/leg-section';
+import { legCutParts, octagonPart, legSection } from '#shared/measure/drawing/leg-section';
 import { polylineData, spot } from '#shared/measure/drawing/polyline-data';
 import { taperedElevation } from '#shared/measure/drawing/tapered-elevation';
 import { axis, closedOutline, cutLine } from '#shared/measure/drawing/upright-corners';
@@ -15,7 +15,7 @@ export const straightLegViews = (shape: StraightLegShape): DrawingView[] => [
     cutParts: legCutParts(shape),
     ...(shape.section === 'octagonal' ? { arrisPart: octagonPart } : {}),
   }),
-  sectionView(shape),
+  legSection(shape),
 ];
 
 /** A member by girths, drawn along its straightened axis as if it were round: each girth as its diameter, its station as a hidden line; in mm. */
