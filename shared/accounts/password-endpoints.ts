@@ -10,6 +10,10 @@ export const mailedToken = z
   .max(80)
   .regex(/^[A-Za-z0-9_-]+$/);
 
+/** A password chosen by whoever was mailed a link. */
+export const passwordByLinkSchema = z.strictObject({ token: mailedToken, password: chosenPassword });
+export type PasswordByLink = z.infer<typeof passwordByLinkSchema>;
+
 export const changePassword = endpoint({
   name: 'changePassword',
   summary: 'Sets a new password for somebody who knows the current one, and ends their other sessions.',
@@ -36,6 +40,6 @@ export const resetPassword = endpoint({
   method: 'post',
   path: '/api/password-resets/completion',
   callers: 'anyone',
-  body: z.strictObject({ token: mailedToken, password: chosenPassword }),
+  body: passwordByLinkSchema,
   answers: {},
 });

@@ -1,6 +1,5 @@
 import * as z from 'zod';
-import { mailedToken } from '#shared/accounts/password-endpoints';
-import { chosenPassword } from '#shared/accounts/password-schema';
+import { passwordByLinkSchema } from '#shared/accounts/password-endpoints';
 import { sessionSchema } from '#shared/accounts/session-schema';
 import { newWorkshopSchema, workshopSchema, workshopSettingsSchema } from '#shared/accounts/workshop-schema';
 import { endpoint, sameForAll } from '#shared/actor/endpoint';
@@ -23,7 +22,7 @@ export const foundByLink = endpoint({
   method: 'post',
   path: '/api/foundations/completion',
   callers: 'anyone',
-  body: z.strictObject({ token: mailedToken, password: chosenPassword }),
+  body: passwordByLinkSchema,
   answers: { public: sessionSchema },
 });
 

@@ -1,4 +1,3 @@
-import { newWorkshopSchema } from '#shared/accounts/workshop-schema';
 import { currencyCodes } from '#shared/money/currency-digits';
 import { inOrder, type Choice } from './choice';
 
@@ -68,8 +67,7 @@ function countryChoices(): readonly Choice[] {
 /** The currencies a workshop may keep its books in. */
 function currencyChoices(): readonly Choice[] {
   const nameOf = names('currency');
-  const accepted = currencyCodes.filter((code) => newWorkshopSchema.shape.currency.safeParse(code).success);
-  return accepted.map((value) => ({ value, label: `${value}, ${nameOf.of(value) ?? value}` }));
+  return currencyCodes.map((value) => ({ value, label: `${value}, ${nameOf.of(value) ?? value}` }));
 }
 
 /** Locales with a figure as they write it, since that is what differs. */
@@ -81,8 +79,12 @@ function localeChoices(present: string): readonly Choice[] {
   return inOrder(offered.map((value) => ({ value, label: `${nameOf.of(value) ?? value}: ${example(value)}` })));
 }
 
+/** Browsers leave UTC out of their list, and machines are set to it all the same. */
 const timeZoneChoices = (): readonly Choice[] =>
-  Intl.supportedValuesOf('timeZone').map((value) => ({ value, label: value.replaceAll('_', ' ') }));
+  [...new Set(['UTC', ...Intl.supportedValuesOf('timeZone')])].map((value) => ({
+    value,
+    label: value.replaceAll('_', ' '),
+  }));
 
 /** What a workshop may choose from; the locale it has is offered even where it is a rare one. */
 export const habitChoices = (presentLocale: string) => ({

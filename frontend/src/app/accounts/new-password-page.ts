@@ -1,44 +1,29 @@
 import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
-import { ReactiveFormsModule } from '@angular/forms';
-import { MatButton } from '@angular/material/button';
-import { Router, RouterLink } from '@angular/router';
-import { resetPassword } from '#shared/accounts/password-endpoints';
+import { Router } from '@angular/router';
+import { resetPassword, type PasswordByLink } from '#shared/accounts/password-endpoints';
 import { Api } from '../core/api/api';
-import { schemaForm } from '../core/forms/schema-form';
 import { Notices } from '../core/problems/notices';
-import { FormComplaint } from '../ui/field/form-complaint';
-import { fragmentToken } from '../core/routing/fragment-token';
-import { PasswordField } from './password-field';
+import { LinkPasswordForm } from './link-password-form';
 import { StrangerFrame } from './stranger-frame';
 
+/** Where the link of a forgotten password leads. */
 @Component({
   selector: 'app-new-password-page',
-  imports: [FormComplaint, MatButton, PasswordField, ReactiveFormsModule, RouterLink, StrangerFrame],
+  imports: [LinkPasswordForm, StrangerFrame],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <app-stranger-frame i18n-heading heading="Choose a new password">
-      @if (token) {
-        <form class="fields single" [formGroup]="form.group" (ngSubmit)="send()">
-          <app-password-field
-            i18n-label
-            label="New password"
-            i18n-hint
-            hint="At least 15 characters; a few words that do not belong together are easy to keep in mind."
-            formControlName="password"
-            [isNew]="true"
-            [complaint]="form.message('password')"
-          />
-          <app-form-complaint [texts]="form.general()" />
-          <div class="actions">
-            <button matButton="filled" type="submit" [disabled]="form.isSending()" i18n>Keep it</button>
-          </div>
-        </form>
-      } @else {
-        <p i18n>
-          This address lacks its secret part. Open the link of the mail itself, or
-          <a routerLink="/forgotten-password">ask for another</a>.
-        </p>
-      }
+      <app-link-password-form
+        i18n-label
+        label="New password"
+        i18n-hint
+        hint="At least 15 characters; a few words that do not belong together are easy to keep in mind."
+        i18n-sendLabel
+        sendLabel="Keep it"
+        another="/forgotten-password"
+        [send]="reset"
+        (taken)="leave()"
+      />
     </app-stranger-frame>
   `,
 })
@@ -47,12 +32,9 @@ export class NewPasswordPage {
   private readonly router = inject(Router);
   private readonly notices = inject(Notices);
 
-  protected readonly token = fragmentToken();
-  protected readonly form = schemaForm(resetPassword.body, { token: this.token, password: '' });
+  protected readonly reset = (body: PasswordByLink) => this.api.call(resetPassword, { body });
 
-  protected async send(): Promise<void> {
-    const wasTaken = await this.form.send((body) => this.api.call(resetPassword, { body }));
-    if (!wasTaken) return;
+  protected async leave(): Promise<void> {
     this.notices.say($localize`Your new password is kept. Please sign in with it.`);
     await this.router.navigateByUrl('/sign-in');
   }

@@ -9,7 +9,6 @@ import {
   output,
 } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
-import { MatButton } from '@angular/material/button';
 import {
   clientContentSchema,
   clientKinds,
@@ -23,11 +22,10 @@ import { newId } from '../core/new-id';
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
 import { focusFirst } from '../ui/field/focus-first';
-import { FormComplaint } from '../ui/field/form-complaint';
 import { ClientCalls } from './client-calls';
 import { clientDifferences } from './client-differences';
 import { clientKindNames } from './client-kind-names';
-import { TwoSides } from './two-sides';
+import { KeptFoot } from './kept-foot';
 
 const nothing: ClientContent = {
   ...{ name: '', kind: 'person', contact: '', email: '', telephone: '', address: '' },
@@ -37,7 +35,7 @@ const nothing: ClientContent = {
 /** Enters a client or changes one. */
 @Component({
   selector: 'app-client-form',
-  imports: [Entry, Field, FormComplaint, MatButton, ReactiveFormsModule, TwoSides],
+  imports: [Entry, Field, KeptFoot, ReactiveFormsModule],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './client-form.html',
 })
@@ -56,6 +54,10 @@ export class ClientForm implements OnInit {
   protected readonly form = this.row.form;
   protected readonly kinds = clientKinds.map((kind) => ({ kind, name: clientKindNames[kind] }));
   protected readonly differences = computed(() => clientDifferences(this.form.parsed(), this.row.meanwhile()));
+
+  protected readonly sendLabel = computed(() =>
+    this.client() ? $localize`Keep the client` : $localize`Enter the client`,
+  );
 
   constructor() {
     holdWhileDirty(this.form);

@@ -6,16 +6,15 @@ import { PagedList } from '../core/lists/paged-list';
 import { SearchEntry } from '../ui/field/search-entry';
 import { EmptyState } from '../ui/page/empty-state';
 import { PageHeader } from '../ui/page/page-header';
-import { Skeleton } from '../ui/page/skeleton';
 import { ClientCalls, type ClientsAsked } from './client-calls';
 import { clientKindNames } from './client-kind-names';
-import { ListFoot } from './list-foot';
+import { ListBody } from './list-body';
 import { RowSteps } from './row-steps';
 
 /** For whom the workshop works, by name. */
 @Component({
   selector: 'app-clients-page',
-  imports: [EmptyState, ListFoot, MatButton, PageHeader, RouterLink, RowSteps, SearchEntry, Skeleton],
+  imports: [EmptyState, ListBody, MatButton, PageHeader, RouterLink, RowSteps, SearchEntry],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './clients-page.html',
   styleUrl: './clients-page.scss',

@@ -1,6 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, type OnInit, output } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
-import { MatButton } from '@angular/material/button';
 import { jobContentSchema, jobKinds, jobSchema, type Job } from '#shared/jobs/job-schema';
 import { holdWhileDirty } from '../core/forms/hold-while-dirty';
 import { RowForm } from '../core/forms/row-form';
@@ -8,19 +7,18 @@ import { newId } from '../core/new-id';
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
 import { focusFirst } from '../ui/field/focus-first';
-import { FormComplaint } from '../ui/field/form-complaint';
 import { ClientField } from './client-field';
 import { JobCalls } from './job-calls';
 import { jobDifferences } from './job-differences';
 import { jobKindNames } from './job-kind-names';
-import { TwoSides } from './two-sides';
+import { KeptFoot } from './kept-foot';
 
 const nothing = { title: '', clientId: null, kind: 'new', reference: '', site: '', note: '' } as const;
 
 /** Opens a job or changes what is known of one. */
 @Component({
   selector: 'app-job-form',
-  imports: [ClientField, Entry, Field, FormComplaint, MatButton, ReactiveFormsModule, TwoSides],
+  imports: [ClientField, Entry, Field, KeptFoot, ReactiveFormsModule],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './job-form.html',
 })
@@ -37,6 +35,10 @@ export class JobForm implements OnInit {
   protected readonly form = this.row.form;
   protected readonly kinds = jobKinds.map((kind) => ({ kind, ...jobKindNames[kind] }));
   protected readonly differences = computed(() => jobDifferences(this.form.parsed(), this.row.meanwhile()));
+
+  protected readonly sendLabel = computed(() =>
+    this.job() ? $localize`Keep the particulars` : $localize`Open the job`,
+  );
 
   constructor() {
     holdWhileDirty(this.form);

@@ -12,13 +12,12 @@ import { Field } from '../ui/field/field';
 import { SearchEntry } from '../ui/field/search-entry';
 import { EmptyState } from '../ui/page/empty-state';
 import { PageHeader } from '../ui/page/page-header';
-import { Skeleton } from '../ui/page/skeleton';
 import { ClientField } from './client-field';
 import { JobCalls, type JobsAsked } from './job-calls';
 import { jobOrderNames } from './job-order-names';
 import { JobStateMark } from './job-state-mark';
 import { jobStateNames } from './job-state-names';
-import { ListFoot } from './list-foot';
+import { ListBody } from './list-body';
 import { RowSteps } from './row-steps';
 
 const orders = Object.keys(jobOrderNames) as JobOrder[];
@@ -35,8 +34,8 @@ interface Narrowed {
 @Component({
   selector: 'app-jobs-page',
   imports: [
-    ...[ClientField, EmptyState, Entry, Field, JobStateMark, ListFoot, MatButton, PageHeader],
-    ...[ReactiveFormsModule, RouterLink, RowSteps, SearchEntry, Skeleton],
+    ...[ClientField, EmptyState, Entry, Field, JobStateMark, ListBody, MatButton, PageHeader],
+    ...[ReactiveFormsModule, RouterLink, RowSteps, SearchEntry],
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './jobs-page.html',

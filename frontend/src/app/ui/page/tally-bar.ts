@@ -7,6 +7,7 @@ import type { TallyCell } from './tally-cell';
   selector: 'app-tally-bar',
   imports: [RouterLink, RouterLinkActive],
   changeDetection: ChangeDetectionStrategy.OnPush,
+  host: { '(window:resize)': 'reveal()' },
   templateUrl: './tally-bar.html',
   styleUrl: './tally-bar.scss',
 })
@@ -17,8 +18,15 @@ export class TallyBar {
 
   /** On a phone the row is wider than the screen; the open place comes into view. */
   protected show(isOpen: boolean, index: number): void {
-    if (!isOpen) return;
-    const cell = this.host.nativeElement.querySelectorAll('a')[index];
+    if (isOpen) this.bringIntoView(this.host.nativeElement.querySelectorAll('a')[index]);
+  }
+
+  /** A phone that is turned shows the open place again. */
+  protected reveal(): void {
+    this.bringIntoView(this.host.nativeElement.querySelector('a.open'));
+  }
+
+  private bringIntoView(cell: Element | null | undefined): void {
     cell?.scrollIntoView?.({ block: 'nearest', inline: 'center' });
   }
 }
