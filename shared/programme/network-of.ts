@@ -1,5 +1,5 @@
 import { addDays, daysBetween } from '#shared/calendar/add-days';
-import { calendarDays, exceptionsByDay, hoursOf } from '#shared/programme/calendar-days';
+import { calendarDays, exceptionsByDay, hoursOf, type CalendarDay } from '#shared/programme/calendar-days';
 import { crewAtWork, crewsOf, type CrewHours } from '#shared/programme/crews';
 import { firstPosition } from '#shared/programme/earliest-times';
 import {
@@ -20,17 +20,15 @@ import {
   type TaskNetwork,
 } from '#shared/programme/task-network';
 
-/** What a request comes to over so many days: its network, the hours, and how lags of each time go by. */
-export interface PlannedHours {
+/** A request as a network, and over how many days of its calendar. */
+export interface NetworkOverDays {
   readonly network: TaskNetwork;
-  readonly hours: CrewHours;
   readonly days: number;
 }
 
 type ProgressOf = (lag: Pick<ProgrammeLag, 'time' | 'paceId'>) => LagProgress;
 
-function crewHours({ calendar, people }: ProgrammeRequest, days: number): CrewHours {
-  const dates = calendarDays(calendar, days);
+function crewHours({ calendar, people }: ProgrammeRequest, dates: readonly CalendarDay[]): CrewHours {
   return {
     people,
     spans: people.map((person) => personSpans(dates, person, calendar)),
@@ -40,9 +38,12 @@ function crewHours({ calendar, people }: ProgrammeRequest, days: number): CrewHo
   };
 }
 
-function progressOf({ calendar, paces }: ProgrammeRequest, hours: CrewHours, days: number): ProgressOf {
+function progressOf(
+  { calendar, paces }: ProgrammeRequest,
+  hours: CrewHours,
+  dates: readonly CalendarDay[],
+): ProgressOf {
   const byPace = new Map(paces.map((pace) => [pace.id, paceProgress(pace)]));
-  const dates = calendarDays(calendar, days);
   const exceptions = exceptionsByDay(calendar.exceptions);
   const byDay = dayProgress(dates, (at) => hoursOf(dates[at].day, calendar.week, exceptions).length > 0);
   const byWork = workProgress(hours.shop);
@@ -141,9 +142,10 @@ function placesOf(request: ProgrammeRequest, at: (taskId: string) => number): Ta
 }
 
 /** A request as a network over so many days of its calendar; RangeError where it names a task or a pace it does not have. */
-export function networkOf(request: ProgrammeRequest, days: number): PlannedHours {
-  const hours = crewHours(request, days);
-  const progress = progressOf(request, hours, days);
+export function networkOf(request: ProgrammeRequest, days: number): NetworkOverDays {
+  const dates = calendarDays(request.calendar, days);
+  const hours = crewHours(request, dates);
+  const progress = progressOf(request, hours, dates);
   const at = placeIn(request);
   const early = releases(request, progress({ time: 'working-days', paceId: null }));
   const tasks = request.tasks.map((task) =>
@@ -152,8 +154,7 @@ export function networkOf(request: ProgrammeRequest, days: number): PlannedHours
   const arcs = [...request.lags, ...approvalLags(request)]
     .flatMap((lag) => arcsOf(lag, { from: at(lag.fromTaskId), to: at(lag.toTaskId) }, progress(lag)))
     .filter((arc) => !request.tasks[arc.to].happened && !isMissed(arc, tasks, request));
-  const network = taskNetwork({ tasks, arcs, places: placesOf(request, at), people: request.people.length });
-  return { network, hours, days };
+  return { days, network: taskNetwork({ tasks, arcs, places: placesOf(request, at), people: request.people.length }) };
 }
 
 /** A most lag from what has happened to what has not yet may have closed before anybody could start. */

@@ -21,9 +21,13 @@ export function failureFinding(request: ProgrammeRequest, { ready, result }: Fir
     const values = { task: name, isBreakable: isBreakable ? 'yes' : 'no' };
     return { kind: 'refuse', code: 'programme-no-hours', values, about: id };
   }
-  const first = request.tasks[failure.arc.to];
-  if (ready.network.tasks[failure.arc.to].anchor)
-    return { kind: 'refuse', code: 'programme-pin-clash', values: { task: first.name }, about: first.id };
-  const next = request.tasks[failure.arc.from].name;
-  return { kind: 'refuse', code: 'programme-no-time', values: { task: first.name, next }, about: first.id };
+  const { from, to, side } = failure.arc;
+  if (ready.network.tasks[to].anchor) {
+    const pinned = request.tasks[to];
+    return { kind: 'refuse', code: 'programme-pin-clash', values: { task: pinned.name }, about: pinned.id };
+  }
+  // A most lag leads back from its later task to its earlier one.
+  const [first, next] =
+    side === 'most' ? [request.tasks[to], request.tasks[from]] : [request.tasks[from], request.tasks[to]];
+  return { kind: 'refuse', code: 'programme-no-time', values: { task: first.name, next: next.name }, about: first.id };
 }

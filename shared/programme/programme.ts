@@ -13,7 +13,7 @@ import { described, noPlan } from '#shared/programme/described-programme';
 import { firstResult, type RequestNetwork } from '#shared/programme/request-network';
 import { replannedFrom } from '#shared/programme/replanned-from';
 import { positionsOf } from '#shared/programme/standing-positions';
-import type { Position } from '#shared/programme/task-network';
+import type { Position, TaskNetwork } from '#shared/programme/task-network';
 
 /** A plan known already, where it still keeps every rule. */
 function keptPlan(ready: RequestNetwork, plan: Programme | undefined): NetworkPlan | null {
@@ -66,8 +66,7 @@ function planned(ready: RequestNetwork, first: NetworkPlan, search: ProgrammeSea
 }
 
 /** What stops a request before anything is planned. */
-function refusal(request: ProgrammeRequest, until_minutes: number): Programme | null {
-  const { network } = networkOf(request, daysUntil(request, until_minutes));
+function refusal(request: ProgrammeRequest, network: TaskNetwork): Programme | null {
   const refusals = requestRefusals(request, network);
   if (refusals.length > 0) return noPlan(request, 'infeasible', refusals);
   const contradiction = programmeContradiction(request, network);
@@ -86,9 +85,10 @@ export function programme(request: ProgrammeRequest, search: ProgrammeSearch = {
   if (request.tasks.length === 0)
     return { ...noPlan(request, 'optimal', []), finish_minutes: request.start_minutes, gap: 0 };
   const until_minutes = Math.max(request.start_minutes, search.backwardFrom_minutes ?? 0);
-  const refused = refusal(request, until_minutes);
+  const { network } = networkOf(request, daysUntil(request, until_minutes));
+  const refused = refusal(request, network);
   if (refused) return refused;
-  const found = firstResult(request, until_minutes);
+  const found = firstResult(request, network, until_minutes);
   const { ready, result } = found;
   const first = result.positions && networkPlan(result.positions);
   const exact = isForward(search)

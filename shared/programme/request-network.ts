@@ -21,9 +21,8 @@ const blocked = (network: TaskNetwork, earliest: EarliestTimes): BlockedNetwork 
   blocks: taskBlocks(network, earliest.starts),
 });
 
-/** A request over so many days of its calendar. */
-function over(request: ProgrammeRequest, days: number): RequestNetwork {
-  const { network } = networkOf(request, days);
+/** A request over the days its network has. */
+function over(request: ProgrammeRequest, network: TaskNetwork): RequestNetwork {
   const earliest = earliestTimes(network);
   return { request, earliest, ...blocked(network, earliest) };
 }
@@ -77,14 +76,16 @@ function firstOver(ready: RequestNetwork): FirstResult {
   return { ready, result, endless: null };
 }
 
-/** A first plan over as many days of the calendar as it takes: twice as many each time the hours run out. */
-export function firstResult(request: ProgrammeRequest, until_minutes: number): FirstResult {
+/** A first plan over as many days of the calendar as it takes: those of the network, and twice as many each time the hours run out. */
+export function firstResult(request: ProgrammeRequest, first: TaskNetwork, until_minutes: number): FirstResult {
   let days = daysUntil(request, until_minutes);
+  let network = first;
   for (;;) {
-    const found = firstOver(over(request, days));
+    const found = firstOver(over(request, network));
     const { failure } = found.result;
     const isOutOfHours = failure !== null && (failure.arc === null || found.ready.earliest.ends.includes(Infinity));
     if (!isOutOfHours || days * 2 > mostDays) return found;
     days *= 2;
+    network = networkOf(request, days).network;
   }
 }

@@ -10,7 +10,7 @@ export interface TaskBlock {
 const onward = ({ tasks, arcsFrom }: TaskNetwork, task: number): number[] =>
   arcsFrom[task].map((arc) => arc.to).filter((to) => tasks[to].anchor === null);
 
-/** Strongly connected tasks, each set after those that lead to it (Tarjan 1972, without recursion so that long chains do no harm). */
+/** Strongly connected tasks in the order of the first of each (Tarjan 1972, without recursion so that long chains do no harm). */
 function connected(network: TaskNetwork): number[][] {
   const count = network.tasks.length;
   const [index, low] = [new Int32Array(count).fill(-1), new Int32Array(count)];
@@ -28,7 +28,7 @@ function connected(network: TaskNetwork): number[][] {
     if (low[task] !== index[task]) return;
     const set = path.splice(path.indexOf(task));
     for (const one of set) isOpen[one] = false;
-    found.push(set);
+    found.push(set.sort((a, b) => a - b));
   };
   const visit = (from: number): void => {
     const stack = [open(from)];
@@ -46,10 +46,10 @@ function connected(network: TaskNetwork): number[][] {
   network.tasks.forEach((task, at) => {
     if (index[at] < 0 && task.anchor === null) visit(at);
   });
-  return found.reverse();
+  return found.sort(([a], [b]) => a - b);
 }
 
-/** The tasks of a network that may move in blocks, each after those it waits for; inside a block in the order of the earliest times given. */
+/** The tasks of a network that may move in blocks, with those each waits for; inside a block in the order of the earliest times given. */
 export function taskBlocks(network: TaskNetwork, earliest: readonly number[]): TaskBlock[] {
   const sets = connected(network);
   const blockOf = new Map(sets.flatMap((set, block) => set.map((task) => [task, block] as const)));

@@ -21,10 +21,4 @@ export const programmePlan = {
   'programme-pin-closed': '{task} is pinned to a time at which nobody can begin it.',
   'programme-pin-clash': '{task} is pinned too early for what has to come before it.',
   'programme-too-late': 'This cannot be done by then: begun at once it is done {late_minutes} later.',
-  'programme-breach-hours': '{task} falls outside the hours of those who do it.',
-  'programme-breach-release': '{task} begins before it may.',
-  'programme-breach-least': '{task} comes too early after {other}: not before {until} on {day}.',
-  'programme-breach-most': '{other} comes too late after {task}: its time is over by then.',
-  'programme-breach-people': '{task} and {other} ask for the same hands at the same time.',
-  'programme-breach-place': 'There is no room for {task}: {place}.',
 } as const;
