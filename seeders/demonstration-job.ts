@@ -22,6 +22,8 @@ export interface DemonstrationJob {
   readonly issueNote: string;
   /** Where its issue A stands. */
   readonly stands: 'issued' | 'sent' | 'accepted';
+  /** What its client asked on their page, and what was answered; an empty answer waits. */
+  readonly thread: readonly { readonly question: string; readonly answer: string }[];
   /** Members as the draft has them since issue A went out. */
   readonly changedSince: readonly MemberEntry[];
 }

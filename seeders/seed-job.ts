@@ -5,6 +5,7 @@ import type { EstimateSettings } from '#shared/estimates/settings';
 import type { App } from '../backend/src/app';
 import { keptMembers, keptPieces, settingsOfJob } from './demonstration-draft';
 import type { DemonstrationJob } from './demonstration-job';
+import { seedClientSide } from './seed-client-side';
 
 interface Begun {
   readonly id: string;
@@ -32,15 +33,13 @@ function laterEntries(job: DemonstrationJob): Change[] {
     .map(({ id, content }) => ({ kind: 'member', id, version: 1, content: { ...content, ...changed.get(id) } }));
 }
 
-async function issueFirst({ estimates, rateCards }: App, actor: Actor, at: { id: string; job: DemonstrationJob }) {
+async function issueFirst(app: App, actor: Actor, at: { id: string; job: DemonstrationJob }) {
+  const { estimates } = app;
   const { job } = at;
   const { estimate } = await estimates.drafts.whole(actor.workshopId, at.id);
   const request = { version: estimate.version, note: job.issueNote, acceptsOldCard: false };
   const issue = await estimates.issues.issue(actor, at.id, request);
-  if (job.stands === 'issued') return;
-  const day = await rateCards.service.today(actor.workshopId);
-  await estimates.issues.mark(actor, issue.id, { state: 'sent', day, note: '' });
-  if (job.stands === 'accepted') await estimates.issues.mark(actor, issue.id, { state: 'accepted', day, note: '' });
+  if (job.stands !== 'issued') await seedClientSide(app, actor, { issueId: issue.id, jobId: estimate.jobId, job });
 }
 
 /** Enters a job with its client and estimate through the services, and brings its issue A to where it stands; answers the estimate's id. */

@@ -26,6 +26,7 @@ const particulars = {
   title: 'Cabinet stand, gilt on oil with silver',
   issueNote: 'With the paler toning you chose from the board.',
   stands: 'accepted',
+  thread: [],
   changedSince: [],
 } as const satisfies Omit<DemonstrationJob, 'pieces' | 'settings'>;
 

@@ -27,6 +27,7 @@ const particulars = {
   title: 'Painted plinth under gilt mouldings',
   issueNote: 'The medallions are priced as painted by one hand.',
   stands: 'issued',
+  thread: [],
 } as const satisfies Omit<DemonstrationJob, 'pieces' | 'settings' | 'changedSince'>;
 
 /** The keeper has since found two more engravings. */

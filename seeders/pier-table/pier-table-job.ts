@@ -27,6 +27,18 @@ const particulars = {
   title: 'Pier-table base, carved and water gilt',
   issueNote: 'As discussed in the drawing room.',
   stands: 'sent',
+  thread: [
+    {
+      question: 'Would the burnished parts match the table on the west pier, which has dulled a good deal?',
+      answer:
+        'We would tone the new work down to it on a sample board first, and bring the board to the house for you to choose from.',
+    },
+    {
+      question:
+        'The committee meets on the first Tuesday. Could the feet be left plain for the moment, and be carved next year?',
+      answer: '',
+    },
+  ],
   changedSince: [],
 } as const satisfies Omit<DemonstrationJob, 'pieces' | 'settings'>;
 

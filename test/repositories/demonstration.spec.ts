@@ -52,6 +52,20 @@ describe('The demonstration', () => {
     expect(changes.map(({ lines }) => lines.length > 0)).toEqual([false, false, true]);
   });
 
+  it('has one decision a client made on their page, and one link that waits with a question nobody has answered', async () => {
+    const { app, workshopId } = seeded;
+    const jobs = (await estimatesInOrder()).map(({ jobId }) => jobId);
+    const { contracts, access, questions } = app.agreements;
+    const decided = await Promise.all(jobs.map((jobId) => contracts.decisions(workshopId, jobId)));
+    expect(decided.map((of) => of.map(({ kind }) => kind))).toEqual([[], ['accepted'], []]);
+    const contract = await contracts.contract(workshopId, jobs[1]);
+    expect(contract?.gross_minor).toBe((await issuesOf())[1].grossMinor);
+    const given = await Promise.all(jobs.map((jobId) => access.ofJob(workshopId, jobId)));
+    expect(given.map((of) => of.filter(({ revokedAt }) => !revokedAt).length)).toEqual([1, 1, 0]);
+    const thread = await questions.ofJob(workshopId, jobs[0]);
+    expect(thread.map(({ author }) => author)).toEqual(['client', 'workshop', 'client']);
+  });
+
   it('has 12 to 60 members in every job', async () => {
     for (const { members } of await estimatesInOrder()) {
       expect(members).toBeGreaterThanOrEqual(12);
