@@ -3,7 +3,7 @@ import { passwordByLinkSchema } from '#shared/accounts/password-endpoints';
 import { sessionSchema } from '#shared/accounts/session-schema';
 import { newWorkshopSchema, workshopSchema, workshopSettingsSchema } from '#shared/accounts/workshop-schema';
 import { endpoint, sameForAll } from '#shared/actor/endpoint';
-import { emailAddress, line } from '#shared/problems/entry-schema';
+import { emailAddress, identifier, line } from '#shared/problems/entry-schema';
 
 export const askToFound = endpoint({
   name: 'askToFound',
@@ -62,6 +62,8 @@ export const readLogo = endpoint({
   method: 'get',
   path: '/api/workshop/logo',
   callers: ['owner', 'estimator', 'bench', 'office'],
+  // Which picture it is changes nothing but the address, so that another one is fetched anew.
+  query: z.strictObject({ file: identifier.optional() }),
   answers: {},
   media: 'image/png',
 });

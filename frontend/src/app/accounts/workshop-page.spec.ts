@@ -91,7 +91,9 @@ describe('WorkshopPage', () => {
     expect([sent.request.body instanceof FormData, sent.request.headers.get('if-match')]).toEqual([true, '"3"']);
     sent.flush({ ...workshop, version: 4, logoFileId: id(41) });
     await settle();
-    expect(element().querySelector('app-logo-entry img')?.getAttribute('src')).toBe(`/api/workshop/logo?${id(41)}`);
+    expect(element().querySelector('app-logo-entry img')?.getAttribute('src')).toBe(
+      `/api/workshop/logo?file=${id(41)}`,
+    );
     button('Take it off').click();
     await settle();
     const taken = http.expectOne({ method: 'DELETE', url: '/api/workshop/logo' });

@@ -19,7 +19,7 @@ export class WorkshopStore {
   /** Another address for every picture, so that the browser never shows the one before. */
   readonly logoAddress = computed(() => {
     const fileId = this.workshop()?.logoFileId;
-    return fileId ? `${addressOf(readLogo)}?${fileId}` : undefined;
+    return fileId ? addressOf(readLogo, { query: { file: fileId } }) : undefined;
   });
 
   /** Keeps the settings; the page writes figures by them from then on. */
