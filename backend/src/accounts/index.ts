@@ -51,11 +51,14 @@ function openRepositories({ database }: Platform) {
   };
 }
 
+const openThrottle = ({ database, clock }: Platform) =>
+  new LoginThrottleService(new LoginAttemptRepository(database), clock);
+
 /** People, their workshops, and how they sign in. */
 export function openAccounts(platform: Platform, audit: Audit): Accounts {
   const repositories = openRepositories(platform);
   const { accounts, memberships, workshopRows } = repositories;
-  const throttle = new LoginThrottleService(new LoginAttemptRepository(platform.database), platform.clock);
+  const throttle = openThrottle(platform);
   const links = new MailedLinks(new MailedLinkRepository(platform.database), platform.clock);
   const base = {
     ...platform,
