@@ -14,6 +14,8 @@ import * as estimates from '#shared/estimates/estimates-endpoints';
 import * as issues from '#shared/estimates/issues-endpoints';
 import * as clients from '#shared/jobs/clients-endpoints';
 import * as jobs from '#shared/jobs/jobs-endpoints';
+import * as board from '#shared/programme/board-endpoints';
+import * as programme from '#shared/programme/programme-endpoints';
 import * as rateCards from '#shared/rate-cards/rate-cards-endpoints';
 
 const isEndpoint = (value: object): value is Endpoint => 'path' in value && 'method' in value;
@@ -30,6 +32,8 @@ export const endpoints: readonly Endpoint[] = [
   jobs,
   estimates,
   issues,
+  programme,
+  board,
   accesses,
   questions,
   agreement,

@@ -9,6 +9,7 @@ import { isPage } from './is-page';
 import { openWebServer, type WebServer } from './platform/http/web-server';
 import type { MailCatcher } from './platform/mail/mail-catcher';
 import type { Platform } from './platform/platform';
+import { openProgramme, type ProgrammeFeature } from './programme';
 import { openRateCards, type RateCards } from './rate-cards';
 
 export interface App {
@@ -17,6 +18,7 @@ export interface App {
   readonly rateCards: RateCards;
   readonly jobs: Jobs;
   readonly estimates: Estimates;
+  readonly programme: ProgrammeFeature;
   readonly agreements: Agreements;
   readonly web: WebServer;
   /** Clears away what has had its time: sessions, keys, links, files that no row names. */
@@ -45,9 +47,10 @@ export function openApp(platform: Platform, catcher?: MailCatcher): App {
     jobs,
     papers: new PaperMaking(),
   });
+  const programme = openProgramme(platform, { accounts, audit, rateCards, jobs, estimates });
   const agreements = openAgreements(platform, { accounts, audit, jobs, estimates });
   const clientPage = openClientPage({ accounts, estimates, agreements, invoices: noInvoices });
-  const features = [audit, accounts, rateCards, jobs, estimates, agreements, clientPage];
+  const features = [audit, accounts, rateCards, jobs, estimates, programme, agreements, clientPage];
   const routes = features.flatMap((feature) => feature.routes);
   const web = openWebServer(platform, {
     routes,
@@ -57,5 +60,5 @@ export function openApp(platform: Platform, catcher?: MailCatcher): App {
     catcher,
   });
   const sweep = async () => void (await Promise.all([web.sweep(), accounts.sweep(), platform.files.sweep()]));
-  return { audit, accounts, rateCards, jobs, estimates, agreements, web, sweep };
+  return { audit, accounts, rateCards, jobs, estimates, programme, agreements, web, sweep };
 }

@@ -3,7 +3,7 @@ import { endpoint, sameForAll, sameForPriced } from '#shared/actor/endpoint';
 import { day, identifier } from '#shared/problems/entry-schema';
 import { benchDaySchema, benchTaskSchema, markSchema } from '#shared/programme/bench-day-schema';
 import { boardSchema } from '#shared/programme/board-schema';
-import { feedEntrySchema, feedFile, feedSchema, newFeedSchema } from '#shared/programme/calendar-feed-schema';
+import { feedEntrySchema, feedSecret, feedSchema, newFeedSchema } from '#shared/programme/calendar-feed-schema';
 
 const oneFeed = z.strictObject({ feedId: identifier });
 
@@ -72,11 +72,11 @@ export const revokeFeed = endpoint({
 
 export const readFeed = endpoint({
   name: 'readFeed',
-  summary: 'A calendar by its secret address (RFC 5545)',
+  summary: 'A calendar by its secret address (RFC 5545); the secret stands in the query, which no log keeps',
   method: 'get',
-  path: '/api/calendar-feeds/:file',
+  path: '/api/calendar-feeds/bolewright.ics',
   callers: 'anyone',
-  params: z.strictObject({ file: feedFile }),
+  query: z.strictObject({ secret: feedSecret }),
   media: 'text/calendar',
   answers: { public: z.unknown() },
 });

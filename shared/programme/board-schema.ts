@@ -33,6 +33,8 @@ export const boardJobSchema = z.strictObject({
   tasks: z.array(boardTask),
 });
 
+export type BoardJob = z.infer<typeof boardJobSchema>;
+
 /** Work of one grade in one week against the hands there are; shares of people with several grades go where they are needed. */
 export const gradeLoadSchema = z.strictObject({
   gradeId: z.string(),

@@ -18,5 +18,5 @@ export type Feed = z.infer<typeof feedSchema>;
 /** Shown once: afterwards only its hash is known. */
 export const newFeedSchema = feedSchema.extend({ address: z.string() });
 
-/** The name of a feed's file: its secret. */
-export const feedFile = z.string().regex(/^[A-Za-z0-9_-]{43}\.ics$/);
+/** What a calendar's address is known by: 256 bits. */
+export const feedSecret = z.string().regex(/^[A-Za-z0-9_-]{43}$/);

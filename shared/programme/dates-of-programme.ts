@@ -1,3 +1,4 @@
+import { holdPoints } from '#shared/buildups/buildup';
 import { addDays, compareDays } from '#shared/calendar/add-days';
 import type { Day } from '#shared/calendar/day';
 import { exceptionsByDay, hoursOf } from '#shared/programme/calendar-days';
@@ -61,12 +62,14 @@ const approvalCodes = {
 
 const note = (code: WordCode, values: Finding['values']): Finding => ({ kind: 'note', code, values });
 
-/** Approvals that are still waited for, each kind and thing once. */
+/** Approvals that are still waited for, by kind: how many, and how long the slowest of them usually takes. */
 function approvalNotes(approvals: readonly ProgrammeApproval[]): Finding[] {
-  const told = new Map<string, Finding>();
-  for (const { hold, name, usual_days: days, given_minutes } of approvals)
-    if (given_minutes === null) told.set(`${hold} ${name}`, note(approvalCodes[hold], { name, days }));
-  return [...told.values()];
+  return holdPoints.flatMap((hold) => {
+    const waited = approvals.filter((approval) => approval.hold === hold && approval.given_minutes === null);
+    const things = new Set(waited.map(({ name }) => name)).size;
+    const days = Math.max(0, ...waited.map(({ usual_days }) => usual_days));
+    return things === 0 ? [] : [note(approvalCodes[hold], { things, days })];
+  });
 }
 
 function airNote({ inputs, request, shop }: DatesAsked): Finding[] {

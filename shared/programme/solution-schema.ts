@@ -2,8 +2,8 @@ import * as z from 'zod';
 import { day, identifier } from '#shared/problems/entry-schema';
 import { minutes, programmePlanSchema } from '#shared/programme/programme-schema';
 
-/** How long the server may look for a better plan. */
-export const solutionRequestSchema = z.strictObject({ seconds: z.int().min(1).max(120) });
+/** How long the server may look for a better plan; `keepsPlan`: from the plan kept last nothing moves that need not. */
+export const solutionRequestSchema = z.strictObject({ seconds: z.int().min(1).max(60), keepsPlan: z.boolean() });
 
 /** `outdated`: a plan was found, but the programme was changed meanwhile, so it was not kept. */
 export const solutionStates = ['waiting', 'working', 'done', 'stopped', 'outdated', 'failed'] as const;

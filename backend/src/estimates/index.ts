@@ -1,3 +1,5 @@
+import type { EstimateInput } from '#shared/estimates/estimate-figures';
+import type { Figures } from '#shared/estimates/figures';
 import type { Accounts } from '../accounts';
 import type { Audit } from '../audit';
 import type { Jobs } from '../jobs';
@@ -34,6 +36,8 @@ export interface Estimates {
   readonly frozen: FrozenIssueService;
   /** What another rate card does to every open estimate. */
   readonly cardEffects: CardEffects;
+  /** Any estimate up to its price, drawn for risk only where the price waits for it. */
+  readonly priced: (input: EstimateInput) => Promise<Figures>;
   readonly routes: readonly Route[];
 }
 
@@ -67,5 +71,6 @@ export function openEstimates({ database, clock, files }: Platform, needs: Estim
   const presence = new PresenceService({ ...parts, presences });
   const effects = cardEffects({ drafts, jobs: needs.jobs, cards: needs.rateCards.service, risks: parts.risks });
   const routes = [...estimateRoutes(drafts, presence), ...issueRoutes(issues)];
-  return { drafts, issues, frozen: new FrozenIssueService(kept), cardEffects: effects, routes };
+  const priced = (input: EstimateInput) => parts.risks.priced(input);
+  return { drafts, issues, frozen: new FrozenIssueService(kept), cardEffects: effects, priced, routes };
 }

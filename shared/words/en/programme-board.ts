@@ -21,6 +21,15 @@ export const programmeBoard = {
   'programme-no-plan': 'There is no plan yet.',
   'programme-plan-none': 'This is no plan: nothing in it says when it ends.',
   'programme-plan-broken': 'The plan breaks what the programme asks for. What it breaks is listed with it.',
+  'programme-breaks-hours': '{task} stands where its people do not work, or where it cannot be done in one go.',
+  'programme-breaks-start': '{task} starts before it may.',
+  'programme-breaks-people': '{task} and {other} ask for the same hands at the same time.',
+  'programme-breaks-place': '{task} finds no room: {place} is full then.',
+  'programme-breaks-lag': '{task} starts before {before} lets it.',
+  'programme-breaks-window': '{task} comes too late after {before}: the window has closed.',
+  'programme-breaks-missing': '{task} is not in the plan.',
+  'programme-breaks-unknown':
+    'The plan holds {tasks, plural, one {a task} other {# tasks}} that are not in the programme any more.',
   'programme-plan-outdated': 'Something the plan rests on has changed since: plan anew.',
   'programme-hold-not-sent': 'A slot is held for an issue that was sent. Mark the issue as sent first.',
   'programme-hold-over': 'The validity of issue {letter} ended on {until}: there is nothing to hold a slot for.',
@@ -34,11 +43,11 @@ export const programmeBoard = {
   'programme-assumes-months': 'Assumed: the air of the workshop month by month.',
   'programme-assumes-estimate-air': 'Assumed: the air of the workshop as the estimate has it.',
   'programme-assumes-carving':
-    'Assumed: the carving of {name} is approved within {days, plural, one {one working day} other {# working days}}.',
+    'Assumed: {things, plural, one {the carving is} other {the carving of # members is}} approved within {days, plural, one {one working day} other {# working days}} of being ready.',
   'programme-assumes-sample':
-    'Assumed: the sample board for {name} is approved within {days, plural, one {one working day} other {# working days}} of the start.',
+    'Assumed: {things, plural, one {the sample board is} other {# sample boards are}} approved within {days, plural, one {one working day} other {# working days}} of the start.',
   'programme-assumes-top':
-    'Assumed: the top is fitted dry to {name} within {days, plural, one {one working day} other {# working days}}.',
+    'Assumed: the top is fitted dry within {days, plural, one {one working day} other {# working days}} of the carving.',
   'programme-assumes-in-hand':
     'Kept in hand before the day offered: {days, plural, one {one working day} other {# working days}}.',
   'programme-assumes-promised':

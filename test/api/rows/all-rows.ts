@@ -4,6 +4,7 @@ import { agreementsRows } from './agreements-rows';
 import { clientPageRows, visitsRows } from './client-page-rows';
 import { estimatesRows } from './estimates-rows';
 import { jobsRows } from './jobs-rows';
+import { programmeRows } from './programme-rows';
 import { rateCardsRows } from './rate-cards-rows';
 
 /** The rows of every feature. */
@@ -12,6 +13,7 @@ export const allRows: MatrixRows = {
   ...rateCardsRows,
   ...jobsRows,
   ...estimatesRows,
+  ...programmeRows,
   ...agreementsRows,
   ...visitsRows,
 };

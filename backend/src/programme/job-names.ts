@@ -1,0 +1,20 @@
+import { jobNumber, type Jobs } from '../jobs';
+import type { PromisedJob } from './promised-jobs';
+
+/** What a job is called wherever its work is shown. */
+export interface JobName {
+  readonly number: string;
+  readonly title: string;
+  readonly clientName: string;
+}
+
+/** The names of the jobs that are promised, by their id. */
+export async function jobNames(
+  jobs: Pick<Jobs, 'job'>,
+  workshopId: string,
+  promised: readonly Pick<PromisedJob, 'jobId'>[],
+): Promise<ReadonlyMap<string, JobName>> {
+  const ids = [...new Set(promised.map(({ jobId }) => jobId))];
+  const rows = await Promise.all(ids.map((id) => jobs.job(workshopId, id)));
+  return new Map(rows.map((row) => [row.id, { number: jobNumber(row), title: row.title, clientName: row.clientName }]));
+}

@@ -1,0 +1,144 @@
+import { compareDays } from '#shared/calendar/add-days';
+import type { Day } from '#shared/calendar/day';
+import { dayOfInstant } from '#shared/calendar/day-of-instant';
+import { chosenDraft } from '#shared/estimates/chosen-draft';
+import type { Draft } from '#shared/estimates/draft';
+import { estimateWork, type EstimateWork } from '#shared/estimates/estimate-work';
+import { programmeFrame, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import type { ProgrammeInputs, TaskMark } from '#shared/programme/programme-inputs';
+import { type EstimateProgramme, programmeOfEstimate } from '#shared/programme/programme-of-estimate';
+import type { PromisedWork } from '#shared/programme/promised-work';
+import type { Shop } from '#shared/programme/shop';
+import type { RateCard } from '#shared/rate-cards/rate-card';
+import type { Accounts } from '../accounts';
+import type { Estimates } from '../estimates';
+import type { Clock } from '../platform/clock/clock';
+import type { RateCards } from '../rate-cards';
+import type { MarkRow } from './mark-model';
+import type { MarkRepository } from './mark-repository';
+import type { ProgrammeRow } from './programme-model';
+import type { ProgrammeRepository } from './programme-repository';
+import type { PromisedJobs } from './promised-jobs';
+import type { ShopService } from './shop-service';
+
+type WholeEstimate = Awaited<ReturnType<Estimates['drafts']['whole']>>;
+
+/** An estimate as it stands for planning: its draft, card and job, the workshop, what is promised elsewhere, where tasks stand. */
+export interface ProgrammeContext {
+  readonly workshopId: string;
+  readonly whole: WholeEstimate;
+  readonly row: ProgrammeRow | undefined;
+  readonly draft: Draft;
+  readonly card: RateCard;
+  readonly shop: Shop;
+  readonly inputs: ProgrammeInputs;
+  readonly marks: readonly TaskMark[];
+  readonly promised: readonly PromisedWork[];
+  readonly frame: ProgrammeFrame;
+  readonly today: Day;
+}
+
+export interface ContextParts {
+  readonly programmes: ProgrammeRepository;
+  readonly marks: MarkRepository;
+  readonly promises: PromisedJobs;
+  readonly shops: ShopService;
+  readonly estimates: Estimates;
+  readonly cards: RateCards['service'];
+  readonly workshops: Accounts['workshops'];
+  readonly clock: Clock;
+}
+
+/** What is assumed of a programme nobody has entered anything of. */
+const startInputs = (today: Day): ProgrammeInputs => ({
+  direction: 'forward',
+  day: today,
+  climate: null,
+  choice: [],
+  inHand_days: 0,
+  lots: [],
+  pins: [],
+  approvals: [],
+});
+
+export const presentMark = (row: MarkRow): TaskMark => ({
+  taskId: row.taskId,
+  startedAt: row.startedAt.toISOString(),
+  endedAt: row.endedAt?.toISOString() ?? null,
+  left_minutes: row.leftMinutes,
+  personIds: row.personIds,
+});
+
+const earliest = (days: readonly Day[]): Day =>
+  days.reduce((first, day) => (compareDays(day, first) < 0 ? day : first));
+
+/** The day minutes are counted from: nothing that was entered or has happened lies before it. */
+export function firstDayOf(
+  inputs: ProgrammeInputs,
+  marks: readonly TaskMark[],
+  at: { known: Day; timeZone: string },
+): Day {
+  const instants = [...marks.map(({ startedAt }) => startedAt), ...inputs.pins.map((pin) => pin.at)];
+  const days = instants.map((instant) => dayOfInstant(Date.parse(instant), at.timeZone));
+  return earliest([at.known, ...days, ...(inputs.direction === 'forward' ? [inputs.day] : [])]);
+}
+
+/** Reads what planning an estimate needs. */
+export class ProgrammeContexts {
+  constructor(private readonly parts: ContextParts) {}
+
+  async today(workshopId: string): Promise<Day> {
+    const { timeZone } = await this.parts.workshops.get(workshopId);
+    return dayOfInstant(this.parts.clock.now().getTime(), timeZone);
+  }
+
+  /** The context with what is entered, or with inputs that are only asked about. */
+  async of(workshopId: string, estimateId: string, asked?: ProgrammeInputs): Promise<ProgrammeContext> {
+    const { programmes, marks, promises, shops, estimates, cards, workshops } = this.parts;
+    const whole = await estimates.drafts.whole(workshopId, estimateId);
+    const row = await programmes.find(workshopId, estimateId);
+    const { timeZone } = await workshops.get(workshopId);
+    const today = await this.today(workshopId);
+    const known = (await marks.ofProgramme(workshopId, estimateId)).map(presentMark);
+    const inputs = asked ?? row?.inputs ?? startInputs(today);
+    const frame = programmeFrame(firstDayOf(inputs, known, { known: row?.firstDay ?? today, timeZone }), timeZone);
+    return {
+      ...{ workshopId, whole, row, inputs, marks: known, frame, today },
+      draft: chosenDraft(estimates.drafts.draft(whole), inputs.choice),
+      card: await cards.card(workshopId, whole.estimate.rateCardId),
+      shop: await shops.shop(workshopId),
+      promised: await promises.around({ workshopId, id: estimateId }, today, frame),
+    };
+  }
+}
+
+/** Another draft, shop or inputs than those that stand, to be asked about. */
+export type Otherwise = Partial<Pick<ProgrammeContext, 'draft' | 'shop' | 'inputs'>>;
+
+const workOf = ({ draft, card }: Pick<ProgrammeContext, 'draft' | 'card'>): EstimateWork => estimateWork(draft, card);
+
+/**
+ * The request of a context. What is planned from now on starts no earlier than today; what was planned before is judged from its own first day, for it
+ * does not become wrong by time going by.
+ */
+export function programmeIn(
+  context: ProgrammeContext,
+  from: 'today' | 'first day',
+  otherwise: Otherwise = {},
+): EstimateProgramme {
+  const at = { ...context, ...otherwise };
+  const entered = at.inputs.direction === 'forward' ? at.inputs.day : at.frame.firstDay;
+  const isAhead = compareDays(entered, at.today) > 0;
+  return programmeOfEstimate({
+    work: workOf(at),
+    pieces: at.draft.pieces,
+    card: at.card,
+    estimateAir: at.draft.settings.shop,
+    shop: at.shop,
+    inputs: at.inputs,
+    marks: at.marks,
+    promised: at.promised,
+    frame: at.frame,
+    startsOn: isAhead || from === 'first day' ? entered : at.today,
+  });
+}

@@ -1,0 +1,58 @@
+import type { Standing } from '#shared/programme/board-schema';
+import { minutesBetween, programmeFrame, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import { promisedWork, type PromisedPlan } from '#shared/programme/promised-plan';
+import type { PromisedWork } from '#shared/programme/promised-work';
+import { shiftedPlan } from '#shared/programme/shifted-plan';
+import { type KeptPlan, unpackedPlan } from './kept-plan';
+import type { ProgrammeRepository, PromisedRow } from './programme-repository';
+
+/** A promised job as its plan was kept, told in the minutes of another frame. */
+export interface PromisedJob extends PromisedPlan {
+  readonly jobId: string;
+  readonly standing: Standing;
+  readonly holdUntil: string | null;
+  readonly kept: KeptPlan;
+  /** Paces with their stretches in the same minutes. */
+  readonly paces: KeptPlan['paces'];
+}
+
+function promisedJob(row: PromisedRow, frame: ProgrammeFrame): PromisedJob {
+  const kept = unpackedPlan(row.kept);
+  const by_minutes = minutesBetween(programmeFrame(kept.firstDay, kept.timeZone), frame);
+  const { id: estimateId, jobId, standing, holdUntil } = row;
+  const { items, placeHolds } = kept;
+  const paces = kept.paces.map(({ id, stretches }) => ({
+    id,
+    stretches: stretches.map(({ from_minutes, factor }) => ({ from_minutes: from_minutes + by_minutes, factor })),
+  }));
+  return {
+    estimateId,
+    jobId,
+    standing,
+    holdUntil,
+    kept,
+    items,
+    placeHolds,
+    paces,
+    plan: shiftedPlan(kept.plan, by_minutes),
+  };
+}
+
+/** The work a workshop has promised, in the minutes of a frame; one estimate may be left out, where it is being planned itself. */
+export class PromisedJobs {
+  constructor(private readonly programmes: ProgrammeRepository) {}
+
+  async all(workshopId: string, today: string, frame: ProgrammeFrame): Promise<PromisedJob[]> {
+    return (await this.programmes.promised(workshopId, today)).map((row) => promisedJob(row, frame));
+  }
+
+  /** What others are promised, for an estimate that is planned around it. */
+  async around(
+    estimate: { workshopId: string; id: string },
+    today: string,
+    frame: ProgrammeFrame,
+  ): Promise<PromisedWork[]> {
+    const rows = await this.programmes.promised(estimate.workshopId, today, estimate.id);
+    return rows.map((row) => promisedWork(promisedJob(row, frame)));
+  }
+}
