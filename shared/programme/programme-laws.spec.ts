@@ -1,0 +1,109 @@
+import * as fc from 'fast-check';
+import { brokenRules } from '#shared/programme/broken-rules-for-specs';
+import { programme } from '#shared/programme/programme';
+import type { Programme } from '#shared/programme/programme-plan';
+import type { ProgrammeRequest } from '#shared/programme/programme-request';
+import { randomRequest } from '#shared/programme/random-request-for-specs';
+import { personForSpecs } from '#shared/programme/request-for-specs';
+
+const requests = fc.nat({ max: 1_000_000 }).map((seed) => randomRequest(seed, 4));
+const quick = { limit: { nodes: 6 } };
+
+/** Requests with a plan of each; those that have none are left out. */
+const planned = requests
+  .map((request) => ({ request, plan: programme(request, quick) }))
+  .filter(({ plan }) => plan.finish_minutes !== null);
+
+const check = (runs: number, law: (made: { request: ProgrammeRequest; plan: Programme }) => void): void =>
+  fc.assert(fc.property(planned, law), { numRuns: runs, seed: 1, endOnFailure: true });
+
+const finishOf = ({ finish_minutes }: Programme): number => finish_minutes ?? Infinity;
+const placesOf = ({ tasks }: Programme) =>
+  tasks.map(({ taskId, start_minutes, end_minutes, personIds }) => [taskId, start_minutes, end_minutes, personIds]);
+
+describe('Every programme', () => {
+  it('keeps hours, grades, crews, lags, racks: nobody is at two places at once', () => {
+    check(150, ({ request, plan }) => expect(brokenRules(request, plan)).toEqual([]));
+  });
+
+  it('ends no earlier than its bound, and is best where it meets it', () => {
+    check(60, ({ plan }) => {
+      expect(plan.lowerBound_minutes).toBeLessThanOrEqual(finishOf(plan));
+      expect(plan.status === 'optimal').toBe(plan.lowerBound_minutes === finishOf(plan));
+      expect(Math.max(...plan.tasks.map(({ end_minutes }) => end_minutes))).toBe(finishOf(plan));
+    });
+  });
+
+  it('is the same of the same request', () => {
+    check(25, ({ request, plan }) => expect(programme(request, quick)).toEqual(plan));
+  });
+
+  it('leaves slack that is there: what is critical lies on a path to the finish', () => {
+    check(60, ({ plan }) => {
+      expect(
+        plan.tasks.filter(({ slack_minutes, isCritical }) => slack_minutes < 0 || isCritical !== (slack_minutes === 0)),
+      ).toEqual([]);
+      const latest = plan.tasks.filter(({ end_minutes }) => end_minutes === finishOf(plan));
+      expect(latest.some(({ isCritical }) => isCritical)).toBe(true);
+    });
+  });
+
+  it('ends no later with more people than the best plan already found', () => {
+    check(30, ({ request, plan }) => {
+      const more = { ...request, people: [...request.people, personForSpecs('new', 'gilder', 'carver')] };
+      expect(finishOf(programme(more, { ...quick, incumbent: plan }))).toBeLessThanOrEqual(finishOf(plan));
+    });
+  });
+
+  it('ends no later with more room than the best plan already found', () => {
+    check(20, ({ request, plan }) => {
+      const more = { ...request, places: request.places.map((place) => ({ ...place, capacity: place.capacity + 1 })) };
+      expect(finishOf(programme(more, { ...quick, incumbent: plan }))).toBeLessThanOrEqual(finishOf(plan));
+    });
+  });
+
+  it('ends no later with wider windows or shorter drying than the best plan already found', () => {
+    check(30, ({ request, plan }) => {
+      const wider = request.lags.map((lag) => ({ ...lag, most: lag.most === null ? null : lag.most + 300 }));
+      const shorter = request.lags.map((lag) => ({ ...lag, least: Math.floor(lag.least / 2) }));
+      for (const lags of [wider, shorter])
+        expect(finishOf(programme({ ...request, lags }, { ...quick, incumbent: plan }))).toBeLessThanOrEqual(
+          finishOf(plan),
+        );
+    });
+  });
+
+  it('stands as it is when nothing has changed', () => {
+    check(40, ({ request, plan }) => expect(placesOf(programme(request, { previous: plan }))).toEqual(placesOf(plan)));
+  });
+
+  it('moves nothing that comes before a change, and keeps every rule after it', () => {
+    check(60, ({ request, plan }) => {
+      const changed = plan.tasks[plan.tasks.length - 1];
+      const longer = (task: ProgrammeRequest['tasks'][number]) =>
+        task.id === changed.taskId ? { ...task, handsOn_minutes: task.handsOn_minutes + 20 } : task;
+      const request2 = { ...request, tasks: request.tasks.map(longer) };
+      const again = programme(request2, { previous: plan });
+      fc.pre(again.finish_minutes !== null);
+      expect(brokenRules(request2, again)).toEqual([]);
+      const tied = new Set(
+        request.lags.filter(({ most }) => most !== null).flatMap((lag) => [lag.fromTaskId, lag.toTaskId]),
+      );
+      const before = plan.tasks.filter(
+        ({ end_minutes, taskId }) => end_minutes <= changed.start_minutes && !tied.has(taskId),
+      );
+      const now = new Map(again.tasks.map((task) => [task.taskId, task.start_minutes]));
+      expect(before.filter(({ taskId, start_minutes }) => now.get(taskId) !== start_minutes)).toEqual([]);
+    });
+  });
+
+  it('that ends by a day wanted keeps every rule too', () => {
+    check(40, ({ request, plan }) => {
+      const wanted = finishOf(plan) + 5000;
+      const late = programme(request, { ...quick, backwardFrom_minutes: wanted });
+      expect(brokenRules(request, late)).toEqual([]);
+      expect(finishOf(late)).toBeLessThanOrEqual(wanted);
+      expect(late.start_minutes).toBeGreaterThanOrEqual(request.start_minutes);
+    });
+  });
+});
