@@ -63,9 +63,7 @@ export function openAccounts(platform: Platform, audit: Audit): Accounts {
   const base = {
     ...platform,
     ...repositories,
-    audit: audit.service,
-    throttle,
-    links,
+    ...{ audit: audit.service, throttle, links },
     letters: new Letters(platform.config),
   };
   const identities = new IdentityService({ accounts, memberships, workshops: workshopRows, throttle });

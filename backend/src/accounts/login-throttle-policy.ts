@@ -12,10 +12,10 @@ const free: Readonly<Record<LoginScope, number>> = { pair: 5, address: 30, accou
 const longestWait_milliseconds = 15 * 60_000;
 
 /** Failures are remembered for an hour after the last one. */
-export const loginMemory_milliseconds = 60 * 60_000;
+const memory_milliseconds = 60 * 60_000;
 
 const isForgotten = ({ lastAt }: LoginCount, now: Date): boolean =>
-  now.getTime() - lastAt.getTime() > loginMemory_milliseconds;
+  now.getTime() - lastAt.getTime() > memory_milliseconds;
 
 function wait_milliseconds(scope: LoginScope, failures: number): number {
   const over = failures - free[scope];
@@ -23,11 +23,13 @@ function wait_milliseconds(scope: LoginScope, failures: number): number {
 }
 
 /** How many milliseconds a scope has to wait from now on; 0 where it may try. */
-export function loginWait_milliseconds(scope: LoginScope, count: LoginCount, now: Date): number {
+function leftToWait_milliseconds(scope: LoginScope, count: LoginCount, now: Date): number {
   const wait = isForgotten(count, now) ? 0 : wait_milliseconds(scope, count.failures);
   return wait === 0 ? 0 : Math.max(0, count.lastAt.getTime() + wait - now.getTime());
 }
 
 /** The failures of a scope with one more attempt. */
-export const loginFailuresWith = (count: LoginCount, now: Date): number =>
-  isForgotten(count, now) ? 1 : count.failures + 1;
+const failuresWith = (count: LoginCount, now: Date): number => (isForgotten(count, now) ? 1 : count.failures + 1);
+
+/** How long failed sign-ins make the next one wait. */
+export const loginThrottlePolicy = { memory_milliseconds, leftToWait_milliseconds, failuresWith } as const;

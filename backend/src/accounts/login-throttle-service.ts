@@ -3,13 +3,7 @@ import { Rejection } from '#shared/problems/rejection';
 import type { WordCode } from '#shared/words/word-code';
 import type { Clock } from '../platform/clock/clock';
 import type { LoginAttemptRepository } from './login-attempt-repository';
-import {
-  loginFailuresWith,
-  loginMemory_milliseconds,
-  loginWait_milliseconds,
-  type LoginCount,
-  type LoginScope,
-} from './login-throttle-policy';
+import { loginThrottlePolicy, type LoginCount, type LoginScope } from './login-throttle-policy';
 
 const trust_milliseconds = 180 * 24 * 60 * 60_000;
 
@@ -57,7 +51,10 @@ export class LoginThrottleService {
   async sweep(): Promise<void> {
     const now = this.clock.now().getTime();
     const before = (age: number) => new Date(now - age);
-    await this.attempts.sweep({ counts: before(loginMemory_milliseconds), trust: before(trust_milliseconds) });
+    await this.attempts.sweep({
+      counts: before(loginThrottlePolicy.memory_milliseconds),
+      trust: before(trust_milliseconds),
+    });
   }
 
   private async count(code: WordCode, scopesOf: () => Promise<Map<string, LoginScope>>): Promise<void> {
@@ -72,10 +69,12 @@ export class LoginThrottleService {
   private async counted(scopes: ReadonlyMap<string, LoginScope>, now: Date): Promise<number> {
     const counts = await this.attempts.hold([...scopes.keys()], now);
     const known = [...scopes].map(([mark, scope]) => ({ mark, scope, count: counts.get(mark) as LoginCount }));
-    const wait = Math.max(...known.map(({ scope, count }) => loginWait_milliseconds(scope, count, now)));
+    const wait = Math.max(
+      ...known.map(({ scope, count }) => loginThrottlePolicy.leftToWait_milliseconds(scope, count, now)),
+    );
     if (wait > 0) return wait;
     for (const { mark, count } of known)
-      await this.attempts.write(mark, { failures: loginFailuresWith(count, now), lastAt: now });
+      await this.attempts.write(mark, { failures: loginThrottlePolicy.failuresWith(count, now), lastAt: now });
     return 0;
   }
 

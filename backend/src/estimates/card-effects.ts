@@ -9,7 +9,7 @@ import type { Jobs, NamedJobRow } from '../jobs';
 import type { CardEffects, RateCardService } from '../rate-cards';
 import type { EstimateService } from './estimate-service';
 import type { RiskDrawing } from './risk-drawing';
-import { inputOf, type WholeEstimate } from './worked-estimate';
+import { inputOf, type WholeEstimate } from './whole-estimate';
 
 interface Parts {
   readonly drafts: EstimateService;

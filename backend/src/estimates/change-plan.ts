@@ -2,7 +2,7 @@ import { canonicalJson } from '#shared/estimates/canonical-json';
 import type { Change } from '#shared/estimates/change-schema';
 import type { Complaint } from '#shared/problems/complaint';
 import { Rejection } from '#shared/problems/rejection';
-import type { WholeEstimate } from './worked-estimate';
+import type { WholeEstimate } from './whole-estimate';
 
 /** What a piece, member or the settings are now, as a change finds them. */
 interface Standing {

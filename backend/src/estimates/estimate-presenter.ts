@@ -7,7 +7,7 @@ import type {
 } from '#shared/estimates/estimate-schema';
 import type { Figures, PricedFigures, WorkFigures } from '#shared/estimates/figures';
 import type { EstimateRow } from './estimate-model';
-import type { WholeEstimate } from './worked-estimate';
+import type { WholeEstimate } from './whole-estimate';
 
 export const presentSummary = (row: EstimateRow): EstimateSummary => ({
   id: row.id,

@@ -26,7 +26,7 @@ import type { EstimateRepository } from './estimate-repository';
 import type { PresenceRepository } from './presence-repository';
 import type { ReadingService } from './reading-service';
 import type { RiskDrawing } from './risk-drawing';
-import { inputOf, type WholeEstimate } from './worked-estimate';
+import { inputOf, type WholeEstimate } from './whole-estimate';
 
 export interface EstimateParts {
   readonly estimates: EstimateRepository;

@@ -4,7 +4,7 @@ import { canonicalJson } from '#shared/estimates/canonical-json';
 import type { Snapshot } from '#shared/estimates/snapshot';
 import type { EstimateRow } from './estimate-model';
 import type { IssueRow } from './issue-model';
-import type { WholeEstimate } from './worked-estimate';
+import type { WholeEstimate } from './whole-estimate';
 
 /** A snapshot as it is kept: gzipped canonical JSON and the SHA-256 of that JSON. */
 export function frozenSnapshot(snapshot: Snapshot): Pick<IssueRow, 'snapshot' | 'sha256'> {

@@ -2,7 +2,7 @@ import type { Figures } from '#shared/estimates/figures';
 import type { IssueState } from '#shared/estimates/issue-schema';
 import { Rejection } from '#shared/problems/rejection';
 import type { IssueRow } from './issue-model';
-import type { WholeEstimate } from './worked-estimate';
+import type { WholeEstimate } from './whole-estimate';
 
 /** What a person said who issues, and what stands. */
 export interface Issuing {

@@ -22,7 +22,7 @@ import { mayBeIssued, mayBeMarked } from './issue-policy';
 import { presentIssue } from './issue-presenter';
 import type { IssueRepository } from './issue-repository';
 import { snapshotOf, snapshotWorkshop } from './snapshot-of';
-import type { WholeEstimate } from './worked-estimate';
+import type { WholeEstimate } from './whole-estimate';
 
 export interface IssueParts extends Pick<
   EstimateParts,

@@ -6,7 +6,7 @@ import type { Figures } from '#shared/estimates/figures';
 import { PreparedAnswer } from '../platform/http/answer';
 import { presentEstimate } from './estimate-presenter';
 import type { ReadingRepository } from './reading-repository';
-import type { WholeEstimate } from './worked-estimate';
+import type { WholeEstimate } from './whole-estimate';
 
 const readers = ['cost', 'price', 'bench'] as const;
 

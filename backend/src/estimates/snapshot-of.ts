@@ -6,7 +6,7 @@ import type { Figures } from '#shared/estimates/figures';
 import type { Snapshot, SnapshotClient, SnapshotJob, SnapshotWorkshop } from '#shared/estimates/snapshot';
 import type { WorkshopSettingsRow } from '../accounts';
 import type { RateCardRow } from '../rate-cards';
-import type { WholeEstimate } from './worked-estimate';
+import type { WholeEstimate } from './whole-estimate';
 
 /** Everything an issue freezes, as it stands at the moment of issuing. */
 export interface Freezing {

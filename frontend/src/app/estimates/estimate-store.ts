@@ -15,7 +15,7 @@ import type { Undone } from './draft/undo-history';
 import { UnfinishedEntries } from './draft/unfinished-entries';
 import { EstimateClient } from './estimate-client';
 import { LiveFigures } from './figures/live-figures';
-import { asCosted, asPriced } from './figures/seen-figures';
+import { asCosted, asPriced } from './figures/as-priced';
 import { Presence, type PresenceAnswer } from './presence';
 
 /** Which estimate the workspace shows. */
