@@ -139,6 +139,10 @@ export const openings: Readonly<Record<string, Opening>> = {
     await page.locator('app-mark-form select').selectOption({ label: 'accepted' });
     await press(page, 'Mark it');
   },
+  'agreements/issue-sending.ts question': async (scene) => {
+    const { jobId, estimateId, issueId } = scene.sent[0]!;
+    await press(await to(scene, `/jobs/${jobId}/estimates/${estimateId}/issue/${issueId}`), 'Take it back');
+  },
   'rate-cards/changes/put-in-force-form.ts question': async (scene) => {
     const page = await to(scene, `/rates/${scene.rateCardId}/changes`);
     const button = page.getByRole('button', { name: /^Put in force/ });

@@ -1,6 +1,6 @@
 import type { Page } from 'playwright-core';
 import { isTooWide, violations } from './violations';
-import { memberPages, pagesOfTheApplication, strangerPages } from './pages';
+import { clientPages, memberPages, pagesOfTheApplication, strangerPages } from './pages';
 import { screens, turnTo } from './screens';
 import { setStage } from './stage';
 import { Walk, type Person } from './walk';
@@ -50,7 +50,7 @@ async function wrongOf(paths: readonly string[], { page, see }: Person): Promise
 
 test('every page of the application is among those looked at', () => {
   expect([...new Set(pagesOfTheApplication())].sort()).toEqual(
-    [...Object.keys(strangerPages), ...Object.keys(memberPages)].sort(),
+    [strangerPages, clientPages, memberPages].flatMap(Object.keys).sort(),
   );
 });
 
@@ -67,3 +67,11 @@ test('the owner reads every page of the workshop', async () => {
   expect(await wrongOf(paths, person)).toEqual({});
   expect(person.complaints).toEqual([]);
 }, 400_000);
+
+test('a client reads what their link opens', async () => {
+  const stage = await setStage(walk);
+  const person = await walk.stranger();
+  const paths = Object.values(clientPages).flatMap((addresses) => addresses(stage));
+  expect(await wrongOf(paths, person)).toEqual({});
+  expect(person.complaints).toEqual([]);
+}, 300_000);

@@ -23,6 +23,7 @@ type AddressesOf = (stage: Stage) => readonly string[];
 
 /** What a stranger opens. */
 export const strangerPages: Readonly<Record<string, readonly string[]>> = {
+  ClientSignInPage: ['/client/sign-in'],
   SignInPage: ['/sign-in'],
   ForgottenPasswordPage: ['/forgotten-password'],
   NewPasswordPage: ['/new-password', '/new-password#a-secret-of-no-use'],
@@ -51,7 +52,7 @@ export const memberPages: Readonly<Record<string, AddressesOf>> = {
   ProfilePage: () => ['/profile'],
   JobsPage: () => ['/jobs'],
   NewJobPage: () => ['/jobs/new'],
-  JobPage: ({ sample }) => [`/jobs/${sample.jobId}`],
+  JobPage: ({ sample, sent }) => [sample, ...sent].map(({ jobId }) => `/jobs/${jobId}`),
   ClientsPage: () => ['/clients'],
   NewClientPage: () => ['/clients/new'],
   ClientPage: ({ jobClientId }) => [`/clients/${jobClientId}`],
@@ -65,7 +66,10 @@ export const memberPages: Readonly<Record<string, AddressesOf>> = {
       (part) => `${estimate(stage)}/price${part && `?part=${part}`}`,
     ),
   IssuePage: place('issue'),
-  IssueViewPage: ({ issued }) => [`/jobs/${issued.jobId}/estimates/${issued.estimateId}/issue/${issued.issueId}`],
+  IssueViewPage: ({ issued, sent }) =>
+    [issued, ...sent].map(
+      ({ jobId, estimateId, issueId }) => `/jobs/${jobId}/estimates/${estimateId}/issue/${issueId}`,
+    ),
   SheetsPage: place('sheets'),
   CardsPage: () => ['/rates'],
   CardPage: ({ rateCardId }) => [`/rates/${rateCardId}`],
@@ -76,4 +80,11 @@ export const memberPages: Readonly<Record<string, AddressesOf>> = {
       .map(({ id }) => id)
       .filter((id) => id !== 'build-ups')
       .map((id) => `/rates/${rateCardId}/${id}`),
+};
+
+/** What a client opens, beginning with the link they were sent. */
+export const clientPages: Readonly<Record<string, AddressesOf>> = {
+  ClientVisitPage: ({ sent }) => sent.map(({ token }) => `/client#${token}`),
+  ClientOverviewPage: () => ['/client/papers'],
+  ClientIssuePage: ({ sent }) => sent.slice(-1).map(({ issueId }) => `/client/issues/${issueId}`),
 };

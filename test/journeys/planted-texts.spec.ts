@@ -5,10 +5,10 @@ import { endpoints } from '#shared/endpoints';
 import { textOfPaper } from '../documents/paper-text';
 import { freeTextsOf, workedOut } from './planting';
 import { openings } from './openings';
-import { memberPages } from './pages';
+import { clientPages, memberPages } from './pages';
 import { PlantedWorkshop } from './planted-workshop';
 import { setStage, type Scene } from './stage';
-import { Walk } from './walk';
+import { Walk, type Person } from './walk';
 
 /**
  * Hostile texts stand in every entry that takes text; every page, dialog and menu then shows them as text and as nothing else
@@ -16,6 +16,7 @@ import { Walk } from './walk';
  */
 let walk: Walk;
 let scene: Scene;
+let client: Person;
 let planted: Map<string, string>;
 const alerts: string[] = [];
 const faults: string[] = [];
@@ -28,10 +29,13 @@ beforeAll(async () => {
   scene = { ...stage, person: await walk.as('owner') };
   await workshop.plantAnotherWorkshop();
   planted = workshop.planting.texts;
-  scene.person.page.on('dialog', (dialog) => {
-    if (dialog.type() !== 'beforeunload') alerts.push(dialog.message());
-    void dialog.accept();
-  });
+  client = await walk.stranger();
+  for (const { page } of [scene.person, client]) {
+    page.on('dialog', (dialog) => {
+      if (dialog.type() !== 'beforeunload') alerts.push(dialog.message());
+      void dialog.accept();
+    });
+  }
 }, 300_000);
 afterAll(() => walk.end());
 
@@ -81,17 +85,20 @@ test('every entry of every request that asks for free text holds a hostile one',
   expect(asked.filter((field) => !planted.has(field) && !knownByARule.test(field))).toEqual([]);
 });
 
-test('every page shows them as text', async () => {
-  const { page } = scene.person;
-  const paths = Object.values(memberPages).flatMap((addresses) => addresses(scene));
-  for (const path of paths) {
+async function lookAtAll({ page }: Person, pages: typeof memberPages): Promise<void> {
+  for (const path of Object.values(pages).flatMap((addresses) => addresses(scene))) {
+    await page.goto('about:blank');
     await page.goto(walk.address + path);
     await page.getByRole('heading').first().waitFor();
     await page.waitForTimeout(300);
     await lookAt(page, path);
   }
   expect(faults).toEqual([]);
-}, 300_000);
+}
+
+test('every page shows them as text', () => lookAtAll(scene.person, memberPages), 300_000);
+
+test('every page of a client shows them as text', () => lookAtAll(client, clientPages), 60_000);
 
 test('every dialog and menu shows them as text', async () => {
   const { page } = scene.person;
@@ -107,7 +114,9 @@ test('every dialog and menu shows them as text', async () => {
 
 test('no script of theirs ran, and the browser refused nothing, because nothing tried', () => {
   expect(alerts).toEqual([]);
-  expect(scene.person.complaints.filter((text) => !/status of (401|412)/.test(text))).toEqual([]);
+  expect(
+    [...client.complaints, ...scene.person.complaints].filter((text) => !/status of (401|412)/.test(text)),
+  ).toEqual([]);
 });
 
 test('papers and mails work out no template', async () => {

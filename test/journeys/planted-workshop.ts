@@ -1,5 +1,11 @@
 import { randomUUID } from 'node:crypto';
 import { v7 as newId } from 'uuid';
+import { answerQuestion } from '#shared/agreements/questions-endpoints';
+import { beginVariation } from '#shared/agreements/agreement-endpoints';
+import { acceptIssue, askClientQuestion, declineIssue } from '#shared/client-page/client-issues-endpoints';
+import { giveAccess } from '#shared/agreements/accesses-endpoints';
+import { addDays } from '#shared/calendar/add-days';
+import { acceptanceOf, visitBy } from '../api/sample-client-visit';
 import { acceptInvitation, changeOwnName, invite } from '#shared/accounts/people-endpoints';
 import { askToFound, changeWorkshop, foundAnother } from '#shared/accounts/workshop-endpoints';
 import type { Endpoint } from '#shared/actor/endpoint';
@@ -9,10 +15,15 @@ import type { MemberContent } from '#shared/estimates/member';
 import type { EstimateSettings, ExtraLine } from '#shared/estimates/settings';
 import { keepClient } from '#shared/jobs/clients-endpoints';
 import { keepJob } from '#shared/jobs/jobs-endpoints';
-import { copyRateCard, keepRateCard, putRateCardInForce } from '#shared/rate-cards/rate-cards-endpoints';
+import {
+  copyRateCard,
+  keepRateCard,
+  putRateCardInForce,
+  workCardEffects,
+} from '#shared/rate-cards/rate-cards-endpoints';
 import { cardInForce, wholeCard } from '../api/sample-card';
 import { clientNamed, jobTitled } from '../api/sample-job';
-import type { Parts } from '../api/visitor';
+import type { Parts, Visitor } from '../api/visitor';
 import { foundingSettings } from '../api/test-workshop';
 import { Planting } from './planting';
 import { done, type Stage } from './stage';
@@ -29,6 +40,7 @@ export class PlantedWorkshop {
     await this.plantJobs();
     await this.plantDrafts();
     await this.plantIssues();
+    await this.plantAgreements();
   }
 
   private send(endpoint: Endpoint, parts: Parts) {
@@ -56,7 +68,7 @@ export class PlantedWorkshop {
     const letterhead = {
       addressLines: ['x', 'y'],
       telephone: 'x',
-      email: 'x',
+      email: '',
       taxRegistration: 'x',
       defaultTaxCategory: 'S',
     };
@@ -82,6 +94,8 @@ export class PlantedWorkshop {
     await this.send(copyRateCard, { params: { rateCardId }, body: { id, name: 'x' } });
     const card = await wholeCard(ours, id);
     const body = { from: await app.rateCards.service.today(ours.id) };
+    await done(walk, workCardEffects, { params: { rateCardId: id }, version: card.version });
+    await walk.api.platform.tasks.runDue();
     await done(walk, putRateCardInForce, { params: { rateCardId: id }, version: card.version, body });
     if ((await cardInForce(ours)).id !== id) throw new Error('the planted card is not in force');
   }
@@ -127,6 +141,28 @@ export class PlantedWorkshop {
       },
     ];
     await this.send(changeEstimate, { params: { estimateId }, body: { changes } });
+  }
+
+  /** One client asks and accepts, another declines; the owner answers and begins a variation. */
+  private async plantAgreements(): Promise<void> {
+    const { walk, sent } = this.stage;
+    const { api } = walk;
+    const [accepted, declined] = sent;
+    if (!accepted || !declined) throw new Error('nothing was sent');
+    const endsOn = addDays(await api.app.rateCards.service.today(api.ours.id), 60);
+    await this.send(giveAccess, { params: { issueId: accepted.issueId }, body: { endsOn, send: true, note: 'x' } });
+    const [first, second] = [await visitBy(api, accepted.token), await visitBy(api, declined.token)];
+    const ask = async (visitor: Visitor, endpoint: Endpoint, parts: Parts) => {
+      const body = this.planting.into(endpoint, parts.body);
+      const response = await visitor.call(endpoint, { ...parts, body, key: randomUUID() });
+      if (response.status >= 300) throw new Error(`${endpoint.name}: ${response.status} ${response.text}`);
+    };
+    await ask(first, askClientQuestion, { params: { issueId: accepted.issueId }, body: { text: 'x' } });
+    const answer = { issueId: accepted.issueId, text: 'x' };
+    await this.send(answerQuestion, { params: { jobId: accepted.jobId }, body: answer });
+    await ask(first, acceptIssue, await acceptanceOf(first, accepted.issueId));
+    await ask(second, declineIssue, { params: { issueId: declined.issueId }, body: { reason: 'x' } });
+    await this.send(beginVariation, { params: { jobId: accepted.jobId }, body: { id: newId(), title: 'x' } });
   }
 
   private async plantIssues(): Promise<void> {

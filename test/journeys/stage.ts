@@ -8,6 +8,7 @@ import { changeEstimate } from '#shared/estimates/estimates-endpoints';
 import { issueEstimate } from '#shared/estimates/issues-endpoints';
 import { draftCard } from '../api/sample-card';
 import { sampleEstimate, sampleMember, type SampleEstimate } from '../api/sample-estimate';
+import { linkTo, sampleIssue, type SampleIssue } from '../api/sample-client-visit';
 import { sampleClient, sampleJob } from '../api/sample-job';
 import type { Parts } from '../api/visitor';
 import type { Person, Walk } from './walk';
@@ -20,6 +21,8 @@ export interface Stage {
   readonly furtherMemberIds: readonly string[];
   /** One that was issued. */
   readonly issued: SampleEstimate & { readonly issueId: string };
+  /** Two more that went to their clients, with the secrets of their links. */
+  readonly sent: readonly (SampleIssue & { readonly token: string })[];
   readonly jobClientId: string;
   readonly bareClientId: string;
   readonly bareJobId: string;
@@ -59,6 +62,11 @@ export async function issueOf(walk: Walk, { estimateId }: SampleEstimate, note =
   return (response.body as { id: string }).id;
 }
 
+async function sentIssue({ api }: Walk): Promise<SampleIssue & { token: string }> {
+  const issue = await sampleIssue(api.ours, api);
+  return { ...issue, token: (await linkTo(api.ours, api, issue.issueId)).token };
+}
+
 export async function setStage(walk: Walk): Promise<Stage> {
   const { ours, app } = walk.api;
   const [sample, other] = [await sampleEstimate(ours), await sampleEstimate(ours)];
@@ -71,6 +79,7 @@ export async function setStage(walk: Walk): Promise<Stage> {
     walk,
     sample,
     furtherMemberIds,
+    sent: [await sentIssue(walk), await sentIssue(walk)],
     issued: { ...other, issueId: await issueOf(walk, other) },
     jobClientId: (await app.jobs.job(ours.id, sample.jobId)).clientId,
     bareClientId: await sampleClient(ours),
