@@ -51,7 +51,11 @@ function isNamedAfterItsExport(file: string): boolean {
   return exported.length === 0 || exported.some(({ name }) => bearsNameOf(file, name));
 }
 
+/** Words bear the name of their feature, whatever it ends in. */
+const isOfWords = (file: string): boolean => file.startsWith('shared/words/');
+
 function isOnItsSide(file: string): boolean {
+  if (isOfWords(file)) return true;
   const suffix = suffixOf(file);
   const side = Object.entries(sideOfSuffix).find(([folder]) =>
     features.some((feature) => file.startsWith(`${folder}/${feature}/`)),

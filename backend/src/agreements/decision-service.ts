@@ -11,7 +11,7 @@ import type { ChoiceService } from './choice-service';
 import type { ClientIssueRows, ClientScope } from './client-scope';
 import type { DecisionLetters } from './decision-letters';
 import type { DecisionRow } from './decision-model';
-import { mayBeAccepted, mayBeDeclined, type Deciding } from './decision-policy';
+import { mayBeAccepted, mayBeDeclined, type Deciding } from './accepted-policy';
 import type { DecisionRepository } from './decision-repository';
 
 interface Parts {

@@ -27,7 +27,7 @@ import { VisitService } from './visit-service';
 
 export type { AcceptedPaperService } from './accepted-paper-service';
 export type { AccessService } from './access-service';
-export { presentQuestion } from './agreement-presenter';
+export { presentQuestion } from './question-presenter';
 export type { ChoiceService } from './choice-service';
 export type { ClientIssueRows, ClientScope } from './client-scope';
 export type { ContractService } from './contract-service';

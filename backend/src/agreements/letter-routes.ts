@@ -7,7 +7,7 @@ import {
   sendLetterAgain,
 } from '#shared/agreements/letters-endpoints';
 import { mount, type Route } from '../platform/http/mount';
-import { presentGivenUp } from './agreement-presenter';
+import { presentGivenUpLetter } from './given-up-letter-presenter';
 import type { LetterService } from './letter-service';
 import type { LetterTemplateService } from './letter-template-service';
 
@@ -22,7 +22,7 @@ export const letterRoutes = (letters: LetterService, templates: LetterTemplateSe
   mount(previewLetter, ({ actor, body: { kind, ...text } }) => letters.preview(actor.workshopId, kind, text)),
   mount(listGivenUpLetters, async ({ actor }) => {
     const given = await letters.givenUp(actor.workshopId);
-    return { items: given.map(presentGivenUp) };
+    return { items: given.map(presentGivenUpLetter) };
   }),
   mount(sendLetterAgain, ({ actor, params }) => letters.sendAgain(actor.workshopId, params.letterId)),
 ];

@@ -7,7 +7,7 @@ import { words } from '../platform/http/words';
 import type { Enclosure, Letter } from '../platform/mail/letter';
 import type { GivenUpLetter, Mailbox } from '../platform/mail/mailbox';
 import { letterFigures, type LetterFigures } from './letter-figures';
-import { letterPage } from './letter-page';
+import { letterHtml } from './letter-html';
 import { refuseFaulty, type LetterTemplateService } from './letter-template-service';
 
 interface Parts {
@@ -80,7 +80,7 @@ export class LetterService {
 
   private fill(workshop: WorkshopSettingsRow, text: LetterText, values: LetterValues): FilledLetter {
     const { html, ...plain } = filledLetter(text, values);
-    return { ...plain, html: letterPage(workshop, { subject: plain.subject, body: html }) };
+    return { ...plain, html: letterHtml(workshop, { subject: plain.subject, body: html }) };
   }
 
   private async readers({ id, name, email }: WorkshopSettingsRow): Promise<Letter['to'][]> {

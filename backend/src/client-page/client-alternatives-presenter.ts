@@ -33,7 +33,11 @@ function zonesOf({ draft }: Snapshot, figures: Figures, isIts: (id: string, alte
 }
 
 /** An alternative beside the base: what it comes to, how long it takes, and the strips of what it brings and takes away. */
-export function presentAlternative(snapshot: Snapshot, alternative: Alternative, own: Figures | undefined): Shown {
+export function presentClientAlternative(
+  snapshot: Snapshot,
+  alternative: Alternative,
+  own: Figures | undefined,
+): Shown {
   const { id, name, group, note, replaces } = alternative;
   const total = snapshot.alternatives.find((one) => one.id === id);
   const before = zonesOf(snapshot, snapshot.figures, (item, of) => of === null && replaces.includes(item));

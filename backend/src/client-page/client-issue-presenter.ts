@@ -11,9 +11,9 @@ import type { WorkshopSettingsRow } from '../accounts';
 import { presentQuestion, type ClientIssueRows, type DecisionRow, type QuestionRow } from '../agreements';
 import type { IssueOfEstimate } from '../estimates';
 import type * as z from 'zod';
-import { presentAlternative, presentBuildUp } from './client-alternatives-presenter';
-import { presentLetterhead } from './client-letterhead-presenter';
-import { presentPieces } from './client-members-presenter';
+import { presentClientAlternative, presentBuildUp } from './client-alternatives-presenter';
+import { presentClientLetterhead } from './client-letterhead-presenter';
+import { presentClientPieces } from './client-pieces-presenter';
 import { presentClientPrice } from './client-price-presenter';
 
 /** All a client's page of an issue is made from. */
@@ -82,10 +82,12 @@ function workOf({ issue: { snapshot }, alternatives, mayChoose }: ClientIssueFac
   const { figures, draft, leafValidUntil } = snapshot;
   return {
     leafValidUntil: figures.leaf.length > 0 ? leafValidUntil : null,
-    pieces: presentPieces(snapshot, alternatives),
+    pieces: presentClientPieces(snapshot, alternatives),
     buildUps: buildUpsUsed(figures.zones).map(presentBuildUp),
     price: presentClientPrice(snapshot),
-    alternatives: draft.settings.alternatives.map((one) => presentAlternative(snapshot, one, alternatives.get(one.id))),
+    alternatives: draft.settings.alternatives.map((one) =>
+      presentClientAlternative(snapshot, one, alternatives.get(one.id)),
+    ),
     mayChoose,
     isDrying: figures.dry.lots.some((lot) => lot.drying_minutes > 0),
     cautions: clientCautions({ findings: figures.findings, isRestoration: draft.settings.restoration }),
@@ -100,7 +102,7 @@ export function presentClientIssue(facts: ClientIssueFacts): ClientIssue {
   const summary = presentClientSummary(issue, { today, timeZone: workshop.timeZone });
   const ofEstimate = all.filter(({ estimate }) => estimate.id === issue.estimate.id);
   return {
-    letterhead: presentLetterhead(workshop),
+    letterhead: presentClientLetterhead(workshop),
     issue: { ...summary, title: snapshot.draft.settings.title },
     replacedBy: row.state === 'replaced' ? (ofEstimate[0]?.row.id ?? null) : null,
     job: { id: job.id, ...snapshot.job },

@@ -2,7 +2,7 @@ import type { ClientLetterhead } from '#shared/client-page/client-letterhead-sch
 import type { WorkshopSettingsRow } from '../accounts';
 
 /** The workshop as its clients see it: what stands over its papers. */
-export const presentLetterhead = (workshop: WorkshopSettingsRow): ClientLetterhead => ({
+export const presentClientLetterhead = (workshop: WorkshopSettingsRow): ClientLetterhead => ({
   name: workshop.name,
   addressLines: [...workshop.addressLines],
   telephone: workshop.telephone,

@@ -12,7 +12,7 @@ import { jobNumber, type NamedJobRow } from '../jobs';
 import { FileAnswer } from '../platform/http/answer';
 import type { ClientInvoices } from './client-invoices';
 import { presentClientIssue, presentClientSummary } from './client-issue-presenter';
-import { presentLetterhead } from './client-letterhead-presenter';
+import { presentClientLetterhead } from './client-letterhead-presenter';
 
 interface Parts {
   readonly accounts: Pick<Accounts, 'workshops'>;
@@ -30,7 +30,7 @@ export class ClientPageService {
     const jobs = await this.parts.agreements.scope.jobs(client);
     const at = { today: await this.today(client), timeZone: workshop.timeZone };
     return {
-      letterhead: presentLetterhead(workshop),
+      letterhead: presentClientLetterhead(workshop),
       client: { name: client.name },
       jobs: await Promise.all(jobs.map((job) => this.jobOf(client, job, at))),
       invoices: [...(await this.parts.invoices.of(client))],

@@ -7,7 +7,7 @@ const face = 'font-family:Georgia,serif;font-size:16px;line-height:1.5;color:#2b
 const foot = 'margin-top:32px;padding-top:12px;border-top:1px solid #b08d3c;font-size:14px;color:#5c5148';
 
 /** A letter as HTML: the workshop's name over it, its address beneath. No picture, no script, nothing that is fetched. */
-export function letterPage(
+export function letterHtml(
   { name, addressLines, telephone }: Sender,
   letter: { subject: string; body: string },
 ): string {

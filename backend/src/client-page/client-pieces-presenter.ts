@@ -25,7 +25,7 @@ function memberOf(member: Member, figures: readonly Figures[]): Piece['members']
  * The pieces with their members as a client sees them: drawn and named, without notes of the bench. Those of alternatives are named from
  * the figures of their alternative.
  */
-export function presentPieces({ draft, figures }: Snapshot, others: ReadonlyMap<string, Figures>): Piece[] {
+export function presentClientPieces({ draft, figures }: Snapshot, others: ReadonlyMap<string, Figures>): Piece[] {
   const figuresOf = ({ alternativeId }: Member): Figures[] => {
     const own = alternativeId === null ? figures : others.get(alternativeId);
     return own ? [own] : [];
