@@ -21,4 +21,9 @@ export const programmePlan = {
   'programme-pin-closed': '{task} is pinned to a time at which nobody can begin it.',
   'programme-pin-clash': '{task} is pinned too early for what has to come before it.',
   'programme-too-late': 'This cannot be done by then: begun at once it is done {late_minutes} later.',
+  'programme-remedy-other-size': 'With {size} instead.',
+  'programme-remedy-portions':
+    'With {task} and what is tied to it in {portions, plural, one {# portion} other {# portions}}.',
+  'programme-remedy-longer-day': 'With a day that is {by_minutes} longer.',
+  'programme-remedy-further-hands': 'With one more of {grade}.',
 } as const;

@@ -1,0 +1,72 @@
+import { inPortions } from '#shared/programme/in-portions';
+import { programme } from '#shared/programme/programme';
+import { programmeRemedies } from '#shared/programme/programme-remedies';
+import { lagForSpecs, requestForSpecs, taskForSpecs } from '#shared/programme/request-for-specs';
+
+/** A three-hour size whose laying has to end four hours after the tack, and four and a half hours of laying. */
+const request = requestForSpecs({
+  tasks: [
+    taskForSpecs('size', { handsOn_minutes: 120, isBreakable: false }),
+    taskForSpecs('lay', { handsOn_minutes: 270, isBreakable: false, mostPeople: 2 }),
+    taskForSpecs('tone'),
+  ],
+  lags: [
+    lagForSpecs('size', 'lay', { least: 180 }),
+    lagForSpecs('size', 'lay', { id: 'window', toPoint: 'end', most: 420 }),
+    lagForSpecs('lay', 'tone', { least: 60 }),
+  ],
+});
+
+const slowSize = {
+  name: 'Twelve-hour size',
+  lags: [
+    lagForSpecs('size', 'lay', { least: 720 }),
+    lagForSpecs('size', 'lay', { id: 'window', toPoint: 'end', most: 1440 }),
+  ],
+};
+
+describe('What helps a size that finds no time', () => {
+  const plan = programme(request);
+  const remedies = programmeRemedies(request, 'size', { otherSizes: [slowSize] });
+  const finishes = new Map(remedies.map(({ code, plan: { finish_minutes } }) => [code, finish_minutes]));
+
+  it('is asked only where there is none', () => {
+    expect(plan).toMatchObject({
+      status: 'infeasible',
+      findings: [{ code: 'programme-contradiction', values: { over_minutes: 30 } }],
+    });
+  });
+
+  it('is each tried by planning anew, soonest first', () => {
+    // With two: size from 8 to 10, laid from 13:00 to 15:15, toned from 16:15, the last quarter of an hour the next morning. Slow size: from 15 to 17, laid
+    // the next day from 8:00 to 13:30, toned from 14:30. In halves: one each day, the second laid from 13:00 to 15:15 and toned as above. However long the
+    // day, four and a half hours do not go into four.
+    expect([...finishes]).toEqual([
+      ['programme-remedy-further-hands', 1440 + 8 * 60 + 15],
+      ['programme-remedy-other-size', 1440 + 15 * 60 + 30],
+      ['programme-remedy-portions', 2 * 1440 + 8 * 60 + 15],
+      ['programme-remedy-longer-day', null],
+    ]);
+    const ends = remedies.map(({ plan: { finish_minutes } }) => finish_minutes ?? Infinity);
+    expect(ends).toEqual([...ends].sort((a, b) => a - b));
+  });
+
+  it('in portions keeps all the work', () => {
+    const halves = inPortions(request, 'size', 2);
+    expect(halves.tasks.map(({ id, handsOn_minutes }) => [id, handsOn_minutes])).toEqual([
+      ['size#1', 60],
+      ['size#2', 60],
+      ['lay#1', 135],
+      ['lay#2', 135],
+      ['tone', 60],
+    ]);
+    expect(halves.lags.map(({ fromTaskId, toTaskId }) => `${fromTaskId} ${toTaskId}`)).toEqual([
+      'size#1 lay#1',
+      'size#2 lay#2',
+      'size#1 lay#1',
+      'size#2 lay#2',
+      'lay#1 tone',
+      'lay#2 tone',
+    ]);
+  });
+});
