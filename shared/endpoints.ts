@@ -8,10 +8,15 @@ import * as agreement from '#shared/agreements/agreement-endpoints';
 import * as letters from '#shared/agreements/letters-endpoints';
 import * as questions from '#shared/agreements/questions-endpoints';
 import * as history from '#shared/audit/history-endpoints';
+import * as clientInvoices from '#shared/client-page/client-invoices-endpoints';
 import * as clientIssues from '#shared/client-page/client-issues-endpoints';
 import * as clientVisits from '#shared/client-page/visits-endpoints';
 import * as estimates from '#shared/estimates/estimates-endpoints';
 import * as issues from '#shared/estimates/issues-endpoints';
+import * as contractAccounts from '#shared/invoices/contract-account-endpoints';
+import * as invoices from '#shared/invoices/invoices-endpoints';
+import * as owed from '#shared/invoices/owed-endpoints';
+import * as payments from '#shared/invoices/payments-endpoints';
 import * as clients from '#shared/jobs/clients-endpoints';
 import * as jobs from '#shared/jobs/jobs-endpoints';
 import * as board from '#shared/programme/board-endpoints';
@@ -38,6 +43,11 @@ export const endpoints: readonly Endpoint[] = [
   questions,
   agreement,
   letters,
+  invoices,
+  contractAccounts,
+  payments,
+  owed,
   clientVisits,
   clientIssues,
+  clientInvoices,
 ].flatMap((file) => Object.values<object>(file).filter(isEndpoint));

@@ -1,9 +1,10 @@
 import { openAccounts, type Accounts } from './accounts';
 import { openAgreements, type Agreements } from './agreements';
 import { openAudit, type Audit } from './audit';
-import { noInvoices, openClientPage } from './client-page';
+import { openClientInvoices, openClientPage } from './client-page';
 import { PaperMaking } from './documents';
 import { openEstimates, type Estimates } from './estimates';
+import { openInvoices, type Invoices } from './invoices';
 import { openJobs, type Jobs } from './jobs';
 import { isPage } from './is-page';
 import { openWebServer, type WebServer } from './platform/http/web-server';
@@ -20,6 +21,7 @@ export interface App {
   readonly estimates: Estimates;
   readonly programme: ProgrammeFeature;
   readonly agreements: Agreements;
+  readonly invoices: Invoices;
   readonly web: WebServer;
   /** Clears away what has had its time: sessions, keys, links, files that no row names. */
   readonly sweep: () => Promise<void>;
@@ -49,8 +51,22 @@ export function openApp(platform: Platform, catcher?: MailCatcher): App {
   });
   const programme = openProgramme(platform, { accounts, audit, rateCards, jobs, estimates });
   const agreements = openAgreements(platform, { accounts, audit, jobs, estimates });
-  const clientPage = openClientPage({ accounts, estimates, agreements, invoices: noInvoices });
-  const features = [audit, accounts, rateCards, jobs, estimates, programme, agreements, clientPage];
+  const contract = agreements.contracts.contract.bind(agreements.contracts);
+  const invoices = openInvoices(platform, { accounts, audit, jobs, contract });
+  const clientInvoices = openClientInvoices(platform, invoices);
+  const clientPage = openClientPage({ accounts, estimates, agreements, invoices: clientInvoices });
+  const features = [
+    audit,
+    accounts,
+    rateCards,
+    jobs,
+    estimates,
+    programme,
+    agreements,
+    invoices,
+    clientPage,
+    clientInvoices,
+  ];
   const routes = features.flatMap((feature) => feature.routes);
   const web = openWebServer(platform, {
     routes,
@@ -60,5 +76,5 @@ export function openApp(platform: Platform, catcher?: MailCatcher): App {
     catcher,
   });
   const sweep = async () => void (await Promise.all([web.sweep(), accounts.sweep(), platform.files.sweep()]));
-  return { audit, accounts, rateCards, jobs, estimates, programme, agreements, web, sweep };
+  return { audit, accounts, rateCards, jobs, estimates, programme, agreements, invoices, web, sweep };
 }

@@ -106,6 +106,7 @@ export const issueInvoice = endpoint({
   /** The version of the draft the person saw. */
   body: z.strictObject({ version: z.int().min(1) }),
   idempotent: true,
+  atOnce: 2,
   answers: sameForPriced(invoiceSchema),
 });
 

@@ -1,10 +1,14 @@
 import { mkdir, mkdtemp, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import request from 'supertest';
+import { takePaymentEvent } from '#shared/invoices/payments-endpoints';
 import type { Role } from '#shared/actor/role';
 import { openApp, type App } from '../../backend/src/app';
 import { readConfig } from '../../backend/src/platform/config/config';
 import { openLog } from '../../backend/src/platform/log/log';
+import { StandInPayments } from '../../backend/src/platform/card-payments/stand-in-payments';
+import { StripePayments } from '../../backend/src/platform/card-payments/stripe-payments';
 import { MailCatcher, type CaughtMail } from '../../backend/src/platform/mail/mail-catcher';
 import { openPlatform } from '../../backend/src/platform/open-platform';
 import type { Platform } from '../../backend/src/platform/platform';
@@ -23,6 +27,8 @@ export interface Api {
   readonly app: App;
   readonly platform: Platform;
   readonly clock: MovingClock;
+  /** What stands in for the payment service. */
+  readonly standIn: StandInPayments;
   readonly ours: TestWorkshop;
   /** Another workshop, whose every text carries the canary. */
   readonly theirs: TestWorkshop;
@@ -47,6 +53,20 @@ const settings = {
   REQUESTS_PER_MINUTE: '1000000',
 };
 
+/** The payment service that stands in, telling its events to the server as if from outside. */
+async function standInFor({ cards, clock }: Platform, app: App): Promise<StandInPayments> {
+  const standIn = new StandInPayments({
+    now: () => clock.now(),
+    deliver: async ({ bytes, signature }) => {
+      const post = request(app.web.express).post(takePaymentEvent.path).set('content-type', 'application/json');
+      await post.set(takePaymentEvent.signature, signature).send(bytes.toString('utf8'));
+    },
+  });
+  const { secretKey, webhookSecret } = standIn;
+  cards.connect(new StripePayments({ secretKey, webhookSecret, at: await standIn.start() }));
+  return standIn;
+}
+
 async function openParts(environment: Environment) {
   const folder = await mkdtemp(join(tmpdir(), 'bolewright-api-'));
   const places = { DATABASE_URL: await freshDatabase(), DATA_DIR: folder, WEB_DIR: join(folder, 'web') };
@@ -58,14 +78,17 @@ async function openParts(environment: Environment) {
   const platform = openPlatform(config, clock, openLog('info', { write: (line: string) => void logLines.push(line) }));
   const catcher = new MailCatcher(join(folder, 'mail'));
   platform.mailbox.connect(await catcher.start(), false);
+  const app = openApp(platform, catcher);
+  const standIn = await standInFor(platform, app);
   const stop = async () => {
+    await standIn.stop();
     await catcher.stop();
     await platform.database.close();
     await rm(folder, { recursive: true, force: true });
     const faults = faultsOfLog(logLines);
     if (faults.length > 0) throw new Error(`The log of this run: ${faults.slice(0, 5).join('; ')}`);
   };
-  return { platform, clock, logLines, catcher, app: openApp(platform, catcher), stop };
+  return { platform, clock, logLines, catcher, standIn, app, stop };
 }
 
 const openWorkshops = async (door: Door) => ({

@@ -7,6 +7,7 @@ import { clientPageRoutes } from './client-page-routes';
 import { ClientPageService } from './client-page-service';
 import { visitRoutes } from './visit-routes';
 
+export { openClientInvoices } from './client-invoice-routes';
 export { noInvoices, type ClientInvoices } from './client-invoices';
 
 export interface ClientPage {

@@ -3,6 +3,7 @@ import { accountsRows } from './accounts-rows';
 import { agreementsRows } from './agreements-rows';
 import { clientPageRows, visitsRows } from './client-page-rows';
 import { estimatesRows } from './estimates-rows';
+import { clientInvoicesRows, invoicesRows } from './invoices-rows';
 import { jobsRows } from './jobs-rows';
 import { programmeRows } from './programme-rows';
 import { rateCardsRows } from './rate-cards-rows';
@@ -15,8 +16,9 @@ export const allRows: MatrixRows = {
   ...estimatesRows,
   ...programmeRows,
   ...agreementsRows,
+  ...invoicesRows,
   ...visitsRows,
 };
 
 /** The rows of what clients may call. */
-export const clientRows: ClientRows = { ...clientPageRows };
+export const clientRows: ClientRows = { ...clientPageRows, ...clientInvoicesRows };
