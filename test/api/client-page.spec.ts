@@ -145,6 +145,21 @@ describe('A link', () => {
     expect(access.endsAt).toBe('2027-03-28T22:00:00.000Z');
   });
 
+  it('opens nothing after its last day, and a visit through it ends with it', async () => {
+    const { issueId } = await sampleIssue(api.ours, api);
+    const { token, accessId } = await linkTo(api.ours, api, issueId);
+    const visitor = await visitBy(api, token);
+    const endAt = (instant: Date) =>
+      api.platform.database.execute('UPDATE client_accesses SET ends_at = :instant WHERE id = :accessId', {
+        ...{ instant, accessId },
+      });
+    await endAt(new Date(api.clock.now().getTime() + 60_000));
+    expect((await read(visitor, issueId)).status).toBe(200);
+    await endAt(new Date(api.clock.now().getTime() - 1));
+    expect((await read(visitor, issueId)).status).toBe(401);
+    expect((await open(token)).status).toBe(410);
+  });
+
   it('says the same of a link that ended, was taken back, or never was', async () => {
     const { issueId } = await sampleIssue(api.ours, api);
     const { token, accessId } = await linkTo(api.ours, api, issueId);
