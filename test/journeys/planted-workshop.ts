@@ -119,7 +119,8 @@ export class PlantedWorkshop {
   private async plantDraft(estimateId: string): Promise<void> {
     const { app, ours } = this.stage.walk.api;
     const { estimate, pieces, members } = await app.estimates.drafts.whole(ours.id, estimateId);
-    await done(this.stage.walk, takeRateCard, { params: { estimateId }, version: estimate.version });
+    const body = { rateCardId: (await cardInForce(ours)).id };
+    await done(this.stage.walk, takeRateCard, { params: { estimateId }, version: estimate.version, body });
     const now = await app.estimates.drafts.whole(ours.id, estimateId);
     const seen = ({ id, version }: { id: string; version: number }) => ({ id, version });
     const changes = [
