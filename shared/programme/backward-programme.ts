@@ -24,11 +24,26 @@ function seenForward(
   });
 }
 
+/** A plan as late as was found, how many were tried, and the moment after which none begins. */
+interface LatePlan {
+  readonly plan: NetworkPlan;
+  readonly plans: number;
+  readonly latestStart: number;
+}
+
+/** A late plan as it is told: its gap is how much earlier it begins than any could, in parts of the time from then to its end. */
+function lateProgramme(ready: RequestNetwork, { plan, plans, latestStart }: LatePlan, bound: number): Programme {
+  const told = described(ready, plan, { bound, plans });
+  const early = Math.max(0, latestStart - told.start_minutes);
+  const whole = plan.finish - latestStart;
+  return { ...told, status: early === 0 ? 'optimal' : 'feasible', gap: early === 0 || whole <= 0 ? 0 : early / whole };
+}
+
 /** Everything as late as it still ends by a moment; null where that would have to begin before it may. */
 function latestPlan(
   ready: RequestNetwork,
   wanted: { readonly finish: number; readonly search: ProgrammeSearch },
-): { plan: NetworkPlan; plans: number } | null {
+): LatePlan | null {
   const network = mirroredNetwork(ready.network, wanted.finish);
   const earliest = earliestTimes(network);
   if (earliest.failed) return null;
@@ -50,7 +65,7 @@ function latestPlan(
     onBetter: () => undefined,
   };
   const { plan, plans } = improvedPlan(blocked, improving);
-  return { plan: networkPlan(seenForward(ready, network, plan.positions)), plans };
+  return { plan: networkPlan(seenForward(ready, network, plan.positions)), plans, latestStart: -bound };
 }
 
 /**
@@ -61,8 +76,7 @@ export function backwardProgramme(ready: RequestNetwork, first: NetworkPlan, sea
   const finish = search.backwardFrom_minutes ?? first.finish;
   const bound = networkBound(ready.network, ready.earliest, first.finish);
   const late = latestPlan(ready, { finish, search });
-  if (late && planBreaches(ready.network, late.plan.positions).length === 0)
-    return described(ready, late.plan, { bound, plans: late.plans });
+  if (late && planBreaches(ready.network, late.plan.positions).length === 0) return lateProgramme(ready, late, bound);
   const improving = {
     first,
     bound: Math.max(bound, Math.min(finish, first.finish)),

@@ -56,31 +56,58 @@ function progressOf(
   };
 }
 
-/** Where a task stands that has happened, is being worked on, or is pinned by somebody. */
-function anchorOf(task: ProgrammeTask, { start_minutes }: ProgrammeRequest, hours: CrewHours): Position | null {
-  const { happened, pinned_minutes, isBreakable } = task;
-  if (happened) {
-    const crew = crewAtWork(happened.personIds, happened.left_minutes, hours);
-    if (happened.left_minutes === 0)
-      return { start: happened.start_minutes, end: happened.end_minutes, busyFrom: happened.start_minutes, crew };
-    const rest = firstPosition({ isBreakable: true }, crew, { start: start_minutes, end: -Infinity });
-    return rest && { start: happened.start_minutes, end: rest.end, busyFrom: rest.start, crew };
-  }
+/** Where a task stands that has happened or is being worked on. */
+function happenedPosition(task: ProgrammeTask, { start_minutes }: ProgrammeRequest, hours: CrewHours): Position | null {
+  const { happened } = task;
+  if (!happened) return null;
+  const crew = crewAtWork(happened.personIds, happened.left_minutes, hours);
+  if (happened.left_minutes === 0)
+    return { start: happened.start_minutes, end: happened.end_minutes, busyFrom: happened.start_minutes, crew };
+  const rest = firstPosition({ isBreakable: true }, crew, { start: start_minutes, end: -Infinity });
+  return rest && { start: happened.start_minutes, end: rest.end, busyFrom: rest.start, crew };
+}
+
+const clash = (one: Position, other: Position): boolean =>
+  one.busyFrom < other.end &&
+  other.busyFrom < one.end &&
+  one.crew.people.some((person) => other.crew.people.includes(person));
+
+/** Where a pinned task stands: with the first who can begin then and are not held by what stands already; null where there are none. */
+function pinnedPosition(
+  task: ProgrammeTask,
+  crews: NetworkTask['crews'],
+  standing: readonly Position[],
+): Position | null {
+  const { pinned_minutes, isBreakable } = task;
   if (pinned_minutes === null) return null;
-  for (const crew of crewsOf(task, hours)) {
+  for (const crew of crews) {
     const found = firstPosition({ isBreakable }, crew, { start: pinned_minutes, end: -Infinity });
-    if (found?.start === pinned_minutes) return { ...found, busyFrom: found.start, crew };
+    const position = found && { ...found, busyFrom: found.start, crew };
+    if (position?.start === pinned_minutes && !standing.some((other) => clash(position, other))) return position;
   }
   return null;
 }
 
-function networkTask(task: ProgrammeTask, request: ProgrammeRequest, hours: CrewHours): NetworkTask {
-  return {
-    crews: crewsOf(task, hours),
-    isBreakable: task.isBreakable,
-    release: Math.max(request.start_minutes, task.release_minutes),
-    anchor: anchorOf(task, request, hours),
-  };
+/** The tasks with their crews; first what has happened finds its place, then what is pinned. */
+function networkTasks(
+  request: ProgrammeRequest,
+  hours: CrewHours,
+  released: ReadonlyMap<string, number>,
+): NetworkTask[] {
+  const anchors = request.tasks.map((task) => happenedPosition(task, request, hours));
+  const crews = request.tasks.map((task) => crewsOf(task, hours));
+  const standing = anchors.filter((anchor) => anchor !== null);
+  request.tasks.forEach((task, at) => {
+    const pinned = task.happened ? null : pinnedPosition(task, crews[at], standing);
+    if (pinned) standing.push(pinned);
+    anchors[at] ??= pinned;
+  });
+  return request.tasks.map(({ id, isBreakable, release_minutes }, at) => ({
+    crews: crews[at],
+    isBreakable,
+    release: Math.max(request.start_minutes, release_minutes, released.get(id) ?? 0),
+    anchor: anchors[at],
+  }));
 }
 
 const placeIn = (request: ProgrammeRequest): ((taskId: string) => number) => {
@@ -92,7 +119,7 @@ const placeIn = (request: ProgrammeRequest): ((taskId: string) => number) => {
   };
 };
 
-/** The two sides of a lag as inequalities; what has happened is not asked to be otherwise, nor a window that has closed meanwhile. */
+/** The two sides of a lag as inequalities. */
 function arcsOf(
   lag: ProgrammeLag,
   at: { readonly from: number; readonly to: number },
@@ -141,25 +168,30 @@ function placesOf(request: ProgrammeRequest, at: (taskId: string) => number): Ta
   }));
 }
 
-/** A request as a network over so many days of its calendar; RangeError where it names a task or a pace it does not have. */
-export function networkOf(request: ProgrammeRequest, days: number): NetworkOverDays {
+/** What has happened is not asked to be otherwise, nor a window to be kept that is known to be missed. */
+function isAsked(arc: NetworkArc, { tasks }: ProgrammeRequest, missed: ReadonlySet<string>): boolean {
+  if (!tasks[arc.to].happened) return true;
+  return arc.side === 'most' && !tasks[arc.from].happened && !missed.has(arc.sourceId);
+}
+
+/**
+ * A request as a network over so many days of its calendar, without windows that are missed (by their lags' ids); RangeError where it names a task or a pace
+ * it does not have. Minutes.
+ */
+export function networkOf(
+  request: ProgrammeRequest,
+  days: number,
+  missed: ReadonlySet<string> = new Set(),
+): NetworkOverDays {
   const dates = calendarDays(request.calendar, days);
   const hours = crewHours(request, dates);
   const progress = progressOf(request, hours, dates);
   const at = placeIn(request);
-  const early = releases(request, progress({ time: 'working-days', paceId: null }));
-  const tasks = request.tasks.map((task) =>
-    networkTask({ ...task, release_minutes: Math.max(task.release_minutes, early.get(task.id) ?? 0) }, request, hours),
-  );
+  const tasks = networkTasks(request, hours, releases(request, progress({ time: 'working-days', paceId: null })));
   const arcs = [...request.lags, ...approvalLags(request)]
     .flatMap((lag) => arcsOf(lag, { from: at(lag.fromTaskId), to: at(lag.toTaskId) }, progress(lag)))
-    .filter((arc) => !request.tasks[arc.to].happened && !isMissed(arc, tasks, request));
+    .filter((arc) => isAsked(arc, request, missed));
   return { days, network: taskNetwork({ tasks, arcs, places: placesOf(request, at), people: request.people.length }) };
-}
-
-/** A most lag from what has happened to what has not yet may have closed before anybody could start. */
-function isMissed(arc: NetworkArc, tasks: readonly NetworkTask[], request: ProgrammeRequest): boolean {
-  return arc.side === 'most' && request.tasks[arc.to].happened !== null && tasks[arc.from].anchor === null;
 }
 
 /** Days of the calendar up to a moment, with a year beyond it at the least. */

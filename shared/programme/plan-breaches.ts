@@ -28,10 +28,10 @@ export function positionAt(
 
 type Positions = readonly (Position | null)[];
 
-const lagBreaches = ({ arcs, tasks }: TaskNetwork, positions: Positions): PlanBreach[] =>
+const lagBreaches = ({ arcs }: TaskNetwork, positions: Positions): PlanBreach[] =>
   arcs.flatMap((arc): PlanBreach[] => {
     const [from, to] = [positions[arc.from], positions[arc.to]];
-    if (!from || !to || (tasks[arc.from].anchor && tasks[arc.to].anchor && arc.side === 'most')) return [];
+    if (!from || !to) return [];
     const needed = arc.shift.later(pointOf(from, arc.fromPoint));
     return needed > pointOf(to, arc.toPoint) ? [{ kind: 'lag', task: arc.to, arc, needed }] : [];
   });

@@ -1,6 +1,7 @@
+import { planBreaches } from '#shared/programme/plan-breaches';
 import type { FirstResult } from '#shared/programme/request-network';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
-import type { TaskNetwork } from '#shared/programme/task-network';
+import type { Position, TaskNetwork } from '#shared/programme/task-network';
 import type { Finding } from '#shared/words/finding';
 
 /** What stops a request before anything is planned: tasks nobody can do, and pins where nobody works. */
@@ -30,4 +31,28 @@ export function failureFinding(request: ProgrammeRequest, { ready, result }: Fir
   const [first, next] =
     side === 'most' ? [request.tasks[to], request.tasks[from]] : [request.tasks[from], request.tasks[to]];
   return { kind: 'refuse', code: 'programme-no-time', values: { task: first.name, next: next.name }, about: first.id };
+}
+
+/** Windows that closed, or will have closed, before anybody can do what they wait for. */
+export const missedWindows = (request: ProgrammeRequest, missed: ReadonlySet<string>): Finding[] =>
+  request.lags
+    .filter(({ id }) => missed.has(id))
+    .map(({ fromTaskId, toTaskId }): Finding => {
+      const name = (id: string): string => request.tasks.find((task) => task.id === id)?.name ?? id;
+      const values = { task: name(fromTaskId), next: name(toTaskId) };
+      return { kind: 'warn', code: 'programme-window-missed', values, about: toTaskId };
+    });
+
+/** Pins that break a rule by themselves, whatever else moves. */
+export function pinClashes(request: ProgrammeRequest, network: TaskNetwork, positions: readonly Position[]): Finding[] {
+  const isPinned = (task: number): boolean =>
+    request.tasks[task].pinned_minutes !== null && !request.tasks[task].happened;
+  const about = planBreaches(network, positions).flatMap((breach) => {
+    const concerned = breach.kind === 'lag' ? [breach.arc.to, breach.arc.from] : [breach.task];
+    return concerned.find(isPinned) ?? [];
+  });
+  return [...new Set(about)].map((task) => {
+    const { id, name } = request.tasks[task];
+    return { kind: 'refuse', code: 'programme-pin-clash', values: { task: name }, about: id };
+  });
 }

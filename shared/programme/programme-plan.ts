@@ -20,7 +20,10 @@ export interface PlannedTask extends MomentSpan {
   readonly waits: readonly Reason[];
 }
 
-/** A plan with its proof: nothing finishes before `lowerBound_minutes`; `gap` is the distance in parts of the time from the start to that bound. */
+/**
+ * A plan with its proof: nothing finishes before `lowerBound_minutes`; `gap` is the distance in parts of the time from the start to that bound, in a
+ * plan backward from a day how much earlier it begins than any could.
+ */
 export interface Programme {
   readonly status: ProjectStatus;
   readonly tasks: readonly PlannedTask[];

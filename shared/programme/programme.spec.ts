@@ -1,8 +1,6 @@
-import * as fc from 'fast-check';
 import { programme } from '#shared/programme/programme';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
-import { brokenRules } from '#shared/programme/broken-rules-for-specs';
 import {
   calendarForSpecs,
   lagForSpecs,
@@ -228,6 +226,33 @@ describe('A programme', () => {
     expect(pinned(at(0, 7)).findings.map(({ code }) => code)).toEqual(['programme-pin-closed']);
   });
 
+  it('gives two pins at one time to two people, and says when a pin breaks a lag to another', () => {
+    const people = [personForSpecs('gina', 'gilder'), personForSpecs('otto', 'gilder')];
+    const pinned_minutes = at(0, 9);
+    const tasks = [taskForSpecs('one', { pinned_minutes }), taskForSpecs('two', { pinned_minutes })];
+    const plan = programme(requestForSpecs({ people, tasks }));
+    expect(plan.tasks.map(({ personIds }) => personIds)).toEqual([['gina'], ['otto']]);
+    const tied = programme(requestForSpecs({ people, tasks, lags: [lagForSpecs('one', 'two')] }));
+    expect(tied).toMatchObject({ status: 'infeasible', findings: [{ code: 'programme-pin-clash' }] });
+  });
+
+  it('keeps the window of what has happened while it can, and says when it cannot any more', () => {
+    const happened = { start_minutes: at(0, 8), end_minutes: at(0, 9), left_minutes: 0, personIds: ['gina'] };
+    const tasks = [
+      taskForSpecs('size', { happened }),
+      taskForSpecs('other', { handsOn_minutes: 200 }),
+      taskForSpecs('lay'),
+    ];
+    const lags = [lagForSpecs('size', 'lay', { least: 60, most: 180 })];
+    const inTime = programme(requestForSpecs({ start_minutes: at(0, 10), tasks, lags }));
+    expect([timesOf(inTime, 'lay')[0], inTime.findings]).toEqual([at(0, 10), []]);
+    const late = programme(requestForSpecs({ start_minutes: at(0, 14), tasks, lags }));
+    expect(late.finish_minutes).not.toBeNull();
+    expect(late.findings).toMatchObject([
+      { kind: 'warn', code: 'programme-window-missed', values: { task: 'size', next: 'lay' }, about: 'lay' },
+    ]);
+  });
+
   it('backward begins as late as it still ends by the day wanted, and says how much too late it would be', () => {
     const request = requestForSpecs({
       tasks: [taskForSpecs('size'), taskForSpecs('lay')],
@@ -238,6 +263,7 @@ describe('A programme', () => {
       [at(4, 14), at(4, 15)],
       [at(4, 16), at(4, 17)],
     ]);
+    expect([plan.status, plan.gap]).toEqual(['optimal', 0]);
     const late = programme(request, { backwardFrom_minutes: at(0, 10) });
     expect(late).toMatchObject({
       status: 'infeasible',

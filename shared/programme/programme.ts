@@ -5,7 +5,7 @@ import { networkBound } from '#shared/programme/network-bound';
 import { daysUntil, networkOf } from '#shared/programme/network-of';
 import { planBreaches } from '#shared/programme/plan-breaches';
 import { programmeContradiction } from '#shared/programme/programme-contradiction';
-import { failureFinding, requestRefusals } from '#shared/programme/programme-failure';
+import { failureFinding, missedWindows, pinClashes, requestRefusals } from '#shared/programme/programme-failure';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeRequest, ProgrammeSearch } from '#shared/programme/programme-request';
 import { projectSchedule } from '#shared/programme/project-schedule';
@@ -36,7 +36,10 @@ function exactProgramme(ready: RequestNetwork, first: NetworkPlan | null, search
     return noPlan(request, status, [{ kind: 'refuse', code: 'programme-impossible', values: {}, about }]);
   }
   const positions = starts && positionsOfStarts(network, project, { starts, from_minutes });
-  return positions && described(ready, networkPlan(positions), { bound: from_minutes + lowerBound, plans: nodes });
+  const plan =
+    positions && described(ready, networkPlan(positions), { bound: from_minutes + lowerBound, plans: nodes });
+  if (plan) search.onBetter?.(plan);
+  return plan;
 }
 
 /** Nodes of the search that proves the best, where nobody sets a limit. */
@@ -85,18 +88,19 @@ export function programme(request: ProgrammeRequest, search: ProgrammeSearch = {
   if (request.tasks.length === 0)
     return { ...noPlan(request, 'optimal', []), finish_minutes: request.start_minutes, gap: 0 };
   const until_minutes = Math.max(request.start_minutes, search.backwardFrom_minutes ?? 0);
-  const { network } = networkOf(request, daysUntil(request, until_minutes));
-  const refused = refusal(request, network);
+  const refused = refusal(request, networkOf(request, daysUntil(request, until_minutes)).network);
   if (refused) return refused;
-  const found = firstResult(request, network, until_minutes);
-  const { ready, result } = found;
+  const found = firstResult(request, until_minutes);
+  const { ready, result, missed } = found;
   const first = result.positions && networkPlan(result.positions);
+  const clashes = first ? pinClashes(request, ready.network, first.positions) : [];
+  if (clashes.length > 0) return noPlan(request, 'infeasible', clashes);
   const exact = isForward(search)
     ? exactProgramme(ready, better(first, keptPlan(ready, search.incumbent)), search)
     : null;
   if (exact) return exact;
   if (!first) return noPlan(request, found.endless ? 'infeasible' : 'unproven', [failureFinding(request, found)]);
-  return search.backwardFrom_minutes === undefined
-    ? planned(ready, first, search)
-    : backwardProgramme(ready, first, search);
+  const plan =
+    search.backwardFrom_minutes === undefined ? planned(ready, first, search) : backwardProgramme(ready, first, search);
+  return { ...plan, findings: [...plan.findings, ...missedWindows(request, missed)] };
 }

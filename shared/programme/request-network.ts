@@ -47,7 +47,22 @@ function firstOrders(ready: RequestNetwork): number[][] {
   const staggered = beats.map((share) =>
     late.map((start, at) => start + share * beat * (rank.get(request.tasks[at].lotId) ?? 0)),
   );
-  return [late, [...earliest.starts], ...staggered];
+  const orders = [late, [...earliest.starts], ...staggered];
+  const pressed = pressedTasks(ready.network);
+  if (pressed.size === 0) return orders;
+  return [late, ...orders.map((order) => order.map((priority, at) => (pressed.has(at) ? priority - ahead : priority)))];
+}
+
+/** More than any priority, so that what is pressed comes before all else. */
+const ahead = 1e9;
+
+/** Tasks that have to be in time for one that stands fast, by a window it opened or since it is pinned, with all they wait for. */
+function pressedTasks({ tasks, arcsFrom, arcsTo }: TaskNetwork): ReadonlySet<number> {
+  const pressed = new Set(
+    tasks.flatMap(({ anchor }, at) => (!anchor && arcsFrom[at].some(({ to }) => tasks[to].anchor) ? [at] : [])),
+  );
+  for (const task of pressed) for (const { from } of arcsTo[task]) if (!tasks[from].anchor) pressed.add(from);
+  return pressed;
 }
 
 /** By how much a lot follows the one before it, in parts of the hands-on work of a lot. */
@@ -76,16 +91,27 @@ function firstOver(ready: RequestNetwork): FirstResult {
   return { ready, result, endless: null };
 }
 
-/** A first plan over as many days of the calendar as it takes: those of the network, and twice as many each time the hours run out. */
-export function firstResult(request: ProgrammeRequest, first: TaskNetwork, until_minutes: number): FirstResult {
-  let days = daysUntil(request, until_minutes);
-  let network = first;
-  for (;;) {
-    const found = firstOver(over(request, network));
+/** A network over as many days of the calendar as it takes to plan it: those it has, and twice as many each time the hours run out. */
+function firstOverDays(request: ProgrammeRequest, until_minutes: number, missed: ReadonlySet<string>): FirstResult {
+  for (let days = daysUntil(request, until_minutes); ; days *= 2) {
+    const found = firstOver(over(request, networkOf(request, days, missed).network));
     const { failure } = found.result;
     const isOutOfHours = failure !== null && (failure.arc === null || found.ready.earliest.ends.includes(Infinity));
     if (!isOutOfHours || days * 2 > mostDays) return found;
-    days *= 2;
-    network = networkOf(request, days).network;
+  }
+}
+
+/** A first plan of a request; windows of what has happened that can be kept no more are left out and named, by the ids of their lags. */
+export function firstResult(
+  request: ProgrammeRequest,
+  until_minutes: number,
+): FirstResult & { readonly missed: ReadonlySet<string> } {
+  const missed = new Set<string>();
+  for (;;) {
+    const found = firstOverDays(request, until_minutes, missed);
+    const arc = found.result.failure?.arc;
+    if (arc?.side !== 'most' || !request.tasks[arc.to].happened || missed.has(arc.sourceId))
+      return { ...found, missed };
+    missed.add(arc.sourceId);
   }
 }

@@ -20,6 +20,8 @@ export const programmePlan = {
   'programme-impossible': 'With the people and places there are, these lags cannot all be kept.',
   'programme-pin-closed': '{task} is pinned to a time at which nobody can begin it.',
   'programme-pin-clash': '{task} is pinned too early for what has to come before it.',
+  'programme-window-missed':
+    'The time of {task} is over before {next} can be done. See what the trade does when it was missed, and have somebody look at it.',
   'programme-too-late': 'This cannot be done by then: begun at once it is done {late_minutes} later.',
   'programme-remedy-other-size': 'With {size} instead.',
   'programme-remedy-portions':
