@@ -9,7 +9,7 @@ import { shapeSchema } from '#shared/measure/shape-schema';
 import { startMeasure } from '#shared/measure/start-measure';
 import type { ZoneTake } from '#shared/measure/zone-take';
 import type { zoneTakeSchema } from '#shared/measure/zone-take-schema';
-import { complaintsOf } from '#shared/problems/complaints-of';
+import { complaintsOf, readBy } from '#shared/problems/complaints-of';
 
 type Frozen<Value> = Value extends object ? { readonly [Key in keyof Value]: Frozen<Value[Key]> } : Value;
 type Same<One, Other> = (<T>() => T extends One ? 1 : 2) extends <T>() => T extends Other ? 1 : 2 ? true : false;
@@ -24,7 +24,7 @@ const agreed: readonly true[] = [
 
 /** Complaints about a shape as `path: code`. */
 function complaints(shape: unknown): string[] {
-  const { error } = shapeSchema.safeParse(shape);
+  const { error } = readBy(shapeSchema, shape);
   return error ? complaintsOf(error).map(({ path, code }) => `${path.join('.')}: ${code}`) : [];
 }
 

@@ -12,7 +12,7 @@ import { Confirm } from '../ui/dialog/confirm';
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
 import { FormComplaint } from '../ui/field/form-complaint';
-import { accessState, isOpenAccess } from './access-names';
+import { accessState, isOpenAccess } from './access-state';
 import { AgreementCalls } from './agreement-calls';
 
 /** Gives the client of an issue a private link, by mail or to be passed on by hand, and shows which links there are. */

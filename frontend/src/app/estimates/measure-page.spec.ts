@@ -230,7 +230,7 @@ describe('MeasurePage', () => {
       ['Zone 2', 'All of it'],
     ]);
     await jest.advanceTimersByTimeAsync(3000);
-    expect(server.member(ids.edge).zones.map(({ name }) => name)).toEqual(['Zone 2', 'All of it']);
+    expect(server.member(ids.edge)?.zones.map(({ name }) => name)).toEqual(['Zone 2', 'All of it']);
     store.undo();
     await settle();
     expect([names(), fields()]).toEqual([
