@@ -27,54 +27,30 @@ export interface App {
   readonly sweep: () => Promise<void>;
 }
 
-/** Joins the features: each is given what stands before it in the list, and brings its routes. */
-export function openApp(platform: Platform, catcher?: MailCatcher): App {
-  const audit = openAudit(platform);
-  const accounts = openAccounts(platform, audit);
-  const rateCards = openRateCards(platform, {
-    ...{ accounts, audit },
-    effects: (asked, tell) => estimates.cardEffects(asked, tell),
-  });
-  const jobs = openJobs(platform, {
-    ...{ audit, accounts },
-    estimates: {
-      hasIssues: (workshopId, jobId) => estimates.drafts.hasIssues(workshopId, jobId),
-      dropDrafts: (workshopId, jobId) => estimates.drafts.drop(workshopId, jobId),
-    },
-  });
-  const estimates: Estimates = openEstimates(platform, {
-    accounts,
-    audit,
-    rateCards,
-    jobs,
-    papers: new PaperMaking(),
-  });
-  const programme = openProgramme(platform, { accounts, audit, rateCards, jobs, estimates });
-  const agreements = openAgreements(platform, { accounts, audit, jobs, estimates });
+/** What stands between a workshop and its clients: what they settle, what is invoiced, and the page for it. */
+function openTowardsClients(platform: Platform, needs: Pick<App, 'accounts' | 'audit' | 'jobs' | 'estimates'>) {
+  const agreements = openAgreements(platform, needs);
   const contract = agreements.contracts.contract.bind(agreements.contracts);
-  const invoices = openInvoices(platform, { accounts, audit, jobs, contract });
+  const invoices = openInvoices(platform, { ...needs, contract });
   const clientInvoices = openClientInvoices(platform, invoices);
-  const clientPage = openClientPage({ accounts, estimates, agreements, invoices: clientInvoices });
-  const features = [
-    audit,
-    accounts,
-    rateCards,
-    jobs,
-    estimates,
-    programme,
-    agreements,
-    invoices,
-    clientPage,
-    clientInvoices,
-  ];
-  const routes = features.flatMap((feature) => feature.routes);
+  const clientPage = openClientPage({ ...needs, agreements, invoices: clientInvoices });
+  return {
+    ...{ audit, accounts, rateCards, jobs, estimates },
+    ...{ programme, agreements, invoices, clientPage, clientInvoices },
+  };
+}
+
+/** The application: all features with their routes, and the server that mounts them. */
+export function openApp(platform: Platform, catcher?: MailCatcher): App {
+  const features = openFeatures(platform);
+  const { accounts, agreements } = features;
   const web = openWebServer(platform, {
-    routes,
+    routes: Object.values(features).flatMap((feature) => feature.routes),
     identities: accounts.identities,
     visits: agreements.visits,
     isPage,
     catcher,
   });
   const sweep = async () => void (await Promise.all([web.sweep(), accounts.sweep(), platform.files.sweep()]));
-  return { audit, accounts, rateCards, jobs, estimates, programme, agreements, invoices, web, sweep };
+  return { ...features, web, sweep };
 }

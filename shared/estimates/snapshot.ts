@@ -2,6 +2,7 @@ import type { Choice, Draft } from '#shared/estimates/draft';
 import type { Figures } from '#shared/estimates/figures';
 import type { LengthUnit } from '#shared/units/length-unit';
 import type { RateCard } from '#shared/rate-cards/rate-card';
+import type { Finding } from '#shared/words/finding';
 
 /** The workshop as it stood over its papers when an issue was made. */
 export interface SnapshotWorkshop {
@@ -33,6 +34,26 @@ export interface SnapshotJob {
   readonly site: string;
 }
 
+/** When one lot, or the carving of one member, is in work; days in the workshop's zone. */
+export interface SnapshotLotDates {
+  readonly piece: string;
+  readonly name: string;
+  readonly work: 'carving' | 'coats';
+  readonly startsOn: string;
+  readonly finishesOn: string;
+  readonly handsOn_minutes: number;
+}
+
+/** The programme an issue speaks of: its dates, what they assume, and when each lot is in work. */
+export interface SnapshotProgramme {
+  readonly startsOn: string;
+  readonly finishesOn: string;
+  readonly offeredOn: string;
+  readonly workingDays: number;
+  readonly assumptions: readonly Finding[];
+  readonly lots: readonly SnapshotLotDates[];
+}
+
 /** What an issue freezes: inputs, rate card, choice, results with their explanation, and which calculator worked them. */
 export interface Snapshot {
   readonly snapshotVersion: 1;
@@ -52,6 +73,8 @@ export interface Snapshot {
   readonly card: RateCard;
   readonly choice: Choice;
   readonly figures: Figures;
+  /** Only where a plan was kept that still held when it was issued; issues made before there were programmes have none. */
+  readonly programme?: SnapshotProgramme;
   /** Each alternative by itself against the base: its own total and the difference, gross, in minor units. */
   readonly alternatives: readonly {
     readonly id: string;

@@ -16,7 +16,7 @@ import { FrozenIssueService } from './frozen-issue-service';
 import type { PaperMaker } from './paper-maker';
 import { IssueRepository } from './issue-repository';
 import { issueRoutes } from './issue-routes';
-import { IssueService } from './issue-service';
+import { type FrozenProgramme, IssueService } from './issue-service';
 import { PresenceRepository } from './presence-repository';
 import { PresenceService } from './presence-service';
 import { ReadingRepository } from './reading-repository';
@@ -41,13 +41,14 @@ export interface Estimates {
   readonly routes: readonly Route[];
 }
 
-/** What stands before estimates in the list of features, and the maker of papers that stands after. */
+/** What stands before estimates in the list of features, and what those that stand after supply: the maker of papers, the programme. */
 export interface EstimatesNeeds {
   readonly accounts: Accounts;
   readonly audit: Audit;
   readonly rateCards: RateCards;
   readonly jobs: Jobs;
   readonly papers: PaperMaker;
+  readonly programme: FrozenProgramme;
 }
 
 /** Estimates: drafts and their issues. */
@@ -67,7 +68,7 @@ export function openEstimates({ database, clock, files }: Platform, needs: Estim
   const presences = new PresenceRepository(database);
   const drafts = new EstimateService({ ...parts, presences, readings, changes: new ChangeService(parts) });
   const kept = { ...parts, drafts, issues: new IssueRepository(database), files, papers: needs.papers };
-  const issues = new IssueService(kept);
+  const issues = new IssueService({ ...kept, programme: needs.programme });
   const presence = new PresenceService({ ...parts, presences });
   const effects = cardEffects({ drafts, jobs: needs.jobs, cards: needs.rateCards.service, risks: parts.risks });
   const routes = [...estimateRoutes(drafts, presence), ...issueRoutes(issues)];

@@ -6,7 +6,7 @@ import type { CostedEstimate, PricedEstimate } from '#shared/estimates/estimate-
 import { issueLetter } from '#shared/estimates/issue-letter';
 import type { Paper } from '#shared/estimates/issue-schema';
 import { lineDifferences, type LineDifference, type NamedLines } from '#shared/estimates/line-differences';
-import type { Snapshot } from '#shared/estimates/snapshot';
+import type { Snapshot, SnapshotProgramme } from '#shared/estimates/snapshot';
 import { Rejection } from '#shared/problems/rejection';
 import type { Doer } from '../audit';
 import { jobNumber, type NamedJobRow } from '../jobs';
@@ -24,6 +24,9 @@ import type { IssueRepository } from './issue-repository';
 import { snapshotOf, snapshotWorkshop } from './snapshot-of';
 import type { WholeEstimate } from './whole-estimate';
 
+/** The programme of an estimate as an issue freezes it; a later feature supplies it. Null where no plan holds. */
+export type FrozenProgramme = (workshopId: string, estimateId: string) => Promise<SnapshotProgramme | null>;
+
 export interface IssueParts extends Pick<
   EstimateParts,
   'estimates' | 'cards' | 'jobs' | 'workshops' | 'audit' | 'clock'
@@ -32,6 +35,7 @@ export interface IssueParts extends Pick<
   readonly issues: IssueRepository;
   readonly files: FileStore;
   readonly papers: PaperMaker;
+  readonly programme: FrozenProgramme;
 }
 
 export interface IssueRequest {
@@ -203,6 +207,7 @@ export class IssueService {
       now: this.parts.clock.now(),
       today: await this.parts.cards.today(workshopId),
       issuedBy: actor.name,
+      programme: await this.parts.programme(workshopId, estimate.id),
     });
   }
 

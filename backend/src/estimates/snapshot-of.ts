@@ -3,7 +3,13 @@ import { calculatorVersion } from '#shared/estimates/calculator-version';
 import { draftInOrder } from '#shared/estimates/draft-in-order';
 import type { AlternativeTotal } from '#shared/estimates/estimate-schema';
 import type { Figures } from '#shared/estimates/figures';
-import type { Snapshot, SnapshotClient, SnapshotJob, SnapshotWorkshop } from '#shared/estimates/snapshot';
+import type {
+  Snapshot,
+  SnapshotClient,
+  SnapshotJob,
+  SnapshotProgramme,
+  SnapshotWorkshop,
+} from '#shared/estimates/snapshot';
 import type { WorkshopSettingsRow } from '../accounts';
 import type { RateCardRow } from '../rate-cards';
 import type { WholeEstimate } from './whole-estimate';
@@ -22,6 +28,8 @@ export interface Freezing {
   readonly today: string;
   readonly issuedBy: string;
   readonly note: string;
+  /** Null where no plan holds. */
+  readonly programme: SnapshotProgramme | null;
 }
 
 export const snapshotWorkshop = (workshop: WorkshopSettingsRow): SnapshotWorkshop => {
@@ -64,5 +72,6 @@ export function snapshotOf(freezing: Freezing): Snapshot {
     choice: [],
     figures,
     alternatives,
+    ...(freezing.programme ? { programme: freezing.programme } : {}),
   };
 }

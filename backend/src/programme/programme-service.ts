@@ -1,18 +1,22 @@
 import type { Actor } from '#shared/actor/actor';
 import { canonicalJson } from '#shared/estimates/canonical-json';
 import { Rejection } from '#shared/problems/rejection';
+import type { SnapshotProgramme } from '#shared/estimates/snapshot';
 import { datesOfProgramme } from '#shared/programme/dates-of-programme';
+import { frozenProgramme } from '#shared/programme/frozen-programme';
+import { minutesBetween, programmeFrame } from '#shared/programme/programme-frame';
 import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import type { EstimateProgramme } from '#shared/programme/programme-of-estimate';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeAnswer } from '#shared/programme/programme-schema';
+import { shiftedPlan } from '#shared/programme/shifted-plan';
 import { verifiedPlan } from '#shared/programme/verified-plan';
 import type { Finding } from '#shared/words/finding';
 import type { Audit, Doer } from '../audit';
 import type { Jobs } from '../jobs';
 import type { Clock } from '../platform/clock/clock';
 import { refuseStale } from '../platform/database/keeping';
-import { type KeptPlan, packed } from './kept-plan';
+import { type KeptPlan, packed, unpackedPlan } from './kept-plan';
 import { firstDayOf, programmeIn, type ProgrammeContext, type ProgrammeContexts } from './programme-context';
 import type { ProgrammeRow } from './programme-model';
 import { holdOf, presentProgramme } from './programme-presenter';
@@ -100,6 +104,18 @@ export class ProgrammeService {
     const { inputs, frame } = await this.parts.contexts.of(workshopId, estimateId);
     const content = { inputs, firstDay: frame.firstDay, changedAt: this.parts.clock.now() };
     return this.begin(workshopId, { id: estimateId, version: 0 }, content);
+  }
+
+  /** The programme as an issue freezes it; null where there is no plan, or one that no longer holds. */
+  async frozen(workshopId: string, estimateId: string): Promise<SnapshotProgramme | null> {
+    const context = await this.parts.contexts.of(workshopId, estimateId);
+    const kept = context.row?.kept ? unpackedPlan(context.row.kept) : null;
+    // An issue speaks of the base; dates of another choice of alternatives are not its own.
+    if (!kept?.dates || context.inputs.choice.length > 0) return null;
+    const frame = programmeFrame(kept.firstDay, kept.timeZone);
+    const plan = shiftedPlan(kept.plan, minutesBetween(frame, context.frame));
+    const { broken } = verifiedPlan(plan, programmeIn(context, 'first day').request);
+    return broken.length > 0 ? null : frozenProgramme({ ...kept, dates: kept.dates, frame });
   }
 
   async record(actor: Doer, { whole }: Pick<ProgrammeContext, 'whole'>, deed: ProgrammeDeed): Promise<void> {

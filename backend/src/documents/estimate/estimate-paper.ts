@@ -16,6 +16,7 @@ import { holdingBlocks } from './holding-blocks';
 import { issueContent, type IssueContent } from './issue-content';
 import { paymentBlocks } from './payment-blocks';
 import { priceTable } from './price-table';
+import { programmeBlocks } from './programme-blocks';
 import { timeBlocks } from './time-blocks';
 
 const titleOf = ({ snapshot }: IssueContent): string =>
@@ -60,6 +61,7 @@ function estimateBlocks(pdf: Pdf, content: IssueContent, logo: Buffer | null): B
     ...textSection(pdf, content, ['paper-included', included]),
     ...textSection(pdf, content, ['paper-excluded', excluded]),
     ...timeBlocks(pdf, content),
+    ...programmeBlocks(pdf, content),
     ...paymentBlocks(pdf, content),
     ...holdingBlocks(pdf, content),
     ...buildUpBlocks(pdf, content),

@@ -11,6 +11,7 @@ import { materialsSheet } from './materials-sheet';
 import { moneyRates } from './money-rates';
 import { NameBook } from './name-book';
 import { priceSheet } from './price-sheet';
+import { programmeSheet } from './programme-sheet';
 import { RatesSheet } from './rates-sheet';
 import { setUpSheet } from './set-up-sheet';
 import { sharedOutSheet } from './shared-out-sheet';
@@ -54,7 +55,10 @@ export function workbookPlan(snapshot: Snapshot): WorkbookPlan {
   const stages = stagesSheet(facts, price.gross);
   const pages = [takeOff, leaf, carving, gilding, setUp, materials, sharedOut].map(({ sheet }) => sheet);
   const [about, booklets] = [aboutSheet(facts, unit), leaf.booklets];
-  return { sheets: [about, ...pages, extras.sheet, rates, price.sheet, stages, booklets], names };
+  return {
+    sheets: [about, ...pages, extras.sheet, rates, price.sheet, stages, booklets, ...programmeSheet(facts)],
+    names,
+  };
 }
 
 /** The workbook of an issue: live formulas from the take-off to the stages, equal bytes for equal content. */
