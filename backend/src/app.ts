@@ -34,10 +34,32 @@ function openTowardsClients(platform: Platform, needs: Pick<App, 'accounts' | 'a
   const invoices = openInvoices(platform, { ...needs, contract });
   const clientInvoices = openClientInvoices(platform, invoices);
   const clientPage = openClientPage({ ...needs, agreements, invoices: clientInvoices });
-  return {
-    ...{ audit, accounts, rateCards, jobs, estimates },
-    ...{ programme, agreements, invoices, clientPage, clientInvoices },
-  };
+  return { agreements, invoices, clientPage, clientInvoices };
+}
+
+/** Joins the features: each is given what stands before it in the list, and brings its routes. */
+function openFeatures(platform: Platform) {
+  const audit = openAudit(platform);
+  const accounts = openAccounts(platform, audit);
+  const rateCards = openRateCards(platform, {
+    ...{ accounts, audit },
+    effects: (asked, tell) => estimates.cardEffects(asked, tell),
+  });
+  const jobs = openJobs(platform, {
+    ...{ audit, accounts },
+    estimates: {
+      hasIssues: (workshopId, jobId) => estimates.drafts.hasIssues(workshopId, jobId),
+      dropDrafts: (workshopId, jobId) => estimates.drafts.drop(workshopId, jobId),
+    },
+  });
+  const estimates: Estimates = openEstimates(platform, {
+    ...{ accounts, audit, rateCards, jobs },
+    papers: new PaperMaking(),
+    programme: (workshopId, estimateId) => programme.programmes.frozen(workshopId, estimateId),
+  });
+  const programme: ProgrammeFeature = openProgramme(platform, { accounts, audit, rateCards, jobs, estimates });
+  const towardsClients = openTowardsClients(platform, { accounts, audit, jobs, estimates });
+  return { audit, accounts, rateCards, jobs, estimates, programme, ...towardsClients };
 }
 
 /** The application: all features with their routes, and the server that mounts them. */
