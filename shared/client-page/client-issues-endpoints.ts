@@ -36,6 +36,7 @@ export const readClientIssue = endpoint({
   path: '/api/client/issues/:issueId',
   callers: 'client',
   params: oneIssue,
+  atOnce: 2,
   answers: { public: clientIssueSchema },
 });
 
@@ -47,6 +48,7 @@ export const priceClientChoice = endpoint({
   callers: 'client',
   params: oneIssue,
   body: choosing,
+  atOnce: 4,
   answers: { public: clientPriceSchema },
 });
 
@@ -59,6 +61,7 @@ export const reviewClientChoice = endpoint({
   callers: 'client',
   params: oneIssue,
   body: choosing,
+  atOnce: 2,
   answers: { public: clientReviewSchema },
 });
 
@@ -72,6 +75,7 @@ export const readClientPaper = endpoint({
   params: oneIssue,
   query: z.strictObject({ choice: z.string().max(1000).default('') }),
   media: 'application/pdf',
+  atOnce: 4,
   answers: { public: z.unknown() },
 });
 
@@ -101,6 +105,7 @@ export const acceptIssue = endpoint({
     pdfSha256: z.string().regex(/^[0-9a-f]{64}$/),
   }),
   idempotent: true,
+  atOnce: 2,
   answers: { public: clientDecisionSchema },
 });
 
