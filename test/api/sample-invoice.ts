@@ -106,9 +106,9 @@ export async function stageInvoice(
   return issued(workshop, body.invoiceId);
 }
 
-/** What the office enters who was paid. */
-export async function paymentOf(workshop: TestWorkshop, api: Api, sample: SampleInvoice, amount_minor: number) {
-  const { clientId, invoiceId } = sample;
+/** What the office enters of a payment for one invoice. */
+export async function paymentOf(workshop: TestWorkshop, api: Api, paid: SampleInvoice & { amount_minor: number }) {
+  const { clientId, invoiceId, amount_minor } = paid;
   return {
     ...{ clientId, way: 'bank', currency: 'EUR', amount_minor, reference: workshop.mark, surplus: 'refuse' },
     receivedOn: await api.app.rateCards.service.today(workshop.id),
@@ -117,6 +117,6 @@ export async function paymentOf(workshop: TestWorkshop, api: Api, sample: Sample
 }
 
 export async function samplePayment(workshop: TestWorkshop, api: Api, amount_minor = 12_000): Promise<Payment> {
-  const body = await paymentOf(workshop, api, await sampleInvoice(workshop), amount_minor);
+  const body = await paymentOf(workshop, api, { ...(await sampleInvoice(workshop)), amount_minor });
   return done(workshop.people.owner.visitor.call(recordPayment, { body, key: randomUUID() }));
 }

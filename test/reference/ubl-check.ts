@@ -26,7 +26,7 @@ const figureAt = (parent: Element, path: string): Decimal => new Decimal(textAt(
 export function ublRoot(xml: string): Element {
   const document = new new JSDOM('').window.DOMParser().parseFromString(xml, 'application/xml');
   if (document.querySelector('parsererror')) throw new Error('this is not well formed');
-  return document.documentElement as unknown as Element;
+  return document.documentElement;
 }
 
 const allowances = (parent: Element, charge: boolean): Element[] =>

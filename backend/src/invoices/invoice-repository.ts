@@ -1,4 +1,4 @@
-import { Op, type WhereOptions } from 'sequelize';
+import { Op } from 'sequelize';
 import type { InvoiceKind } from '#shared/invoices/invoice';
 import type { InvoiceState } from '#shared/invoices/invoice-schema';
 import type { Database } from '../platform/database/database';
@@ -23,7 +23,7 @@ export class InvoiceRepository extends WorkshopRows<InvoiceRow> {
     const { jobId, clientId, kind, state, open } = asked;
     const named = Object.entries({ jobId, clientId, kind, state }).filter(([, value]) => value !== undefined);
     const where = { ...Object.fromEntries(named), ...(open ? { openMinor: { [Op.gt]: 0 } } : {}) };
-    return this.page(workshopId, asked, where as WhereOptions<InvoiceRow>);
+    return this.page(workshopId, asked, where);
   }
 
   /** Those that claim something of a job's contract, in the order they were begun. */

@@ -117,7 +117,7 @@ export const invoicesRows: MatrixRows = {
   },
   recordPayment: {
     prepare: async (workshop, api) => ({
-      body: await paymentOf(workshop, api, await sampleInvoice(workshop), 12_000),
+      body: await paymentOf(workshop, api, { ...(await sampleInvoice(workshop)), amount_minor: 12_000 }),
       ...keyed(),
     }),
     history: 'history-payment-entered',
@@ -126,7 +126,10 @@ export const invoicesRows: MatrixRows = {
   sharePayment: {
     prepare: async (workshop, api) => {
       const first = await sampleInvoice(workshop);
-      const entry = { ...(await paymentOf(workshop, api, first, 15_000)), surplus: 'keep' } as const;
+      const entry = {
+        ...(await paymentOf(workshop, api, { ...first, amount_minor: 15_000 })),
+        surplus: 'keep',
+      } as const;
       const shares = [{ invoiceId: first.invoiceId, amount_minor: 12_000 }];
       const owner = workshop.people.owner.actor;
       const record = () => api.app.invoices.recording.record(owner, { ...entry, way: 'bank', shares });

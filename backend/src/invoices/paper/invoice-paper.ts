@@ -98,7 +98,7 @@ function footBlocks(pdf: Pdf, paper: InvoiceOnPaper, hasData: boolean): Block[] 
 function enclose(pdf: Pdf, invoice: FrozenInvoice, xml: string): void {
   const made = new Date(invoice.issuedAt);
   const options = { name: `${invoice.number}.xml`, type: 'text/xml', relationship: 'Alternative' };
-  pdf.file(Buffer.from(xml), { ...options, creationDate: made, modifiedDate: made } as never);
+  pdf.file(Buffer.from(xml), { ...options, creationDate: made, modifiedDate: made });
 }
 
 function invoiceBlocks(pdf: Pdf, paper: InvoiceOnPaper, parts: InvoicePaperParts): Block[] {

@@ -34,6 +34,7 @@ export class StandInPayments {
   readonly ledger = new StandInLedger();
   private readonly signer = new Stripe(this.secretKey);
   private readonly answered = new Map<string, unknown>();
+  private readonly telling = new Set<Promise<void>>();
   private readonly server: Server = createServer((request, response) => void this.serve(request, response));
 
   constructor(private readonly settings: StandInSettings) {}
@@ -50,6 +51,12 @@ export class StandInPayments {
     const closed = new Promise<void>((resolve) => this.server.close(() => resolve()));
     this.server.closeAllConnections();
     await closed;
+    await this.quiet();
+  }
+
+  /** Waits until every event that was begun has arrived or is lost. */
+  async quiet(): Promise<void> {
+    await Promise.all(this.telling);
   }
 
   /** Pays a session as its payer would; the event may be held back, to be sent later, again, or never. */
@@ -89,15 +96,15 @@ export class StandInPayments {
     if (asked.path.startsWith('/pay/')) return this.servePage(asked, response);
     const isKnown = request.headers.authorization === `Bearer ${this.secretKey}`;
     const [status, answer] = isKnown
-      ? await this.answer(asked)
+      ? this.answer(asked)
       : [401, { error: { type: 'authentication_error', message: 'no such key' } }];
     response.writeHead(status, { 'content-type': 'application/json' }).end(JSON.stringify(answer));
   }
 
-  private async answer(asked: Asked): Promise<readonly [number, unknown]> {
+  private answer(asked: Asked): readonly [number, unknown] {
     try {
       const before = asked.key === undefined ? undefined : this.answered.get(asked.key);
-      const answer = before ?? (await this.done(asked));
+      const answer = before ?? this.done(asked);
       if (asked.key !== undefined) this.answered.set(asked.key, answer);
       return answer === undefined
         ? [404, { error: { type: 'invalid_request_error', message: 'not here' } }]
@@ -107,7 +114,7 @@ export class StandInPayments {
     }
   }
 
-  private async done({ method, path, fields }: Asked): Promise<unknown> {
+  private done({ method, path, fields }: Asked): unknown {
     const id = /^\/v1\/checkout\/sessions\/(cs_[\w-]+)/.exec(path)?.[1];
     if (method === 'POST' && path === '/v1/checkout/sessions')
       return this.ledger.begin(fields, `http://127.0.0.1:${this.port}`);
@@ -117,7 +124,8 @@ export class StandInPayments {
       return { object: 'list', has_more: false, data: this.ledger.refundsOf(fields['payment_intent'] ?? '') };
     if (method !== 'POST' || path !== '/v1/refunds') return undefined;
     const refund = this.ledger.refund(fields);
-    await this.tell('refund.created', refund);
+    // Told beside the answer, as the service does: whoever asked may hold what the event waits for.
+    this.telling.add(this.tell('refund.created', refund));
     return refund;
   }
 

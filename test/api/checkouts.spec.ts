@@ -1,0 +1,250 @@
+import { randomUUID } from 'node:crypto';
+import request from 'supertest';
+import Stripe from 'stripe';
+import { v7 as newId } from 'uuid';
+import {
+  askClientCheckout,
+  beginClientCheckout,
+  listClientInvoices,
+} from '#shared/client-page/client-invoices-endpoints';
+import type { Checkout, Payment } from '#shared/invoices/payment-schema';
+import { askCheckout, listPayments, refundPayment, takePaymentEvent } from '#shared/invoices/payments-endpoints';
+import { readOwed } from '#shared/invoices/owed-endpoints';
+import { ledgerFaults } from './ledger';
+import { acceptedIssue } from './sample-client-visit';
+import { paymentOf, readBack, sampleInvoice, stageInvoice } from './sample-invoice';
+import { recordPayment } from '#shared/invoices/payments-endpoints';
+import { startApi, type Api } from './start-api';
+
+/** The payment service standing in speaks the HTTP of the live one and signs as it does; here its events are held back, repeated and bent. */
+let api: Api;
+beforeAll(async () => {
+  api = await startApi();
+}, 60_000);
+afterEach(async () => expect(await ledgerFaults(api.platform.database)).toEqual([]));
+afterAll(() => api.stop());
+
+type Signed = { bytes: Buffer; signature: string };
+
+const post = ({ bytes, signature }: Signed) => {
+  const made = request(api.app.web.express).post(takePaymentEvent.path).set('content-type', 'application/json');
+  return (signature === '' ? made : made.set(takePaymentEvent.signature, signature)).send(bytes.toString('utf8'));
+};
+
+async function begun(sample?: { clientId: string; invoiceId: string }) {
+  const { invoiceId, clientId } = sample ?? (await sampleInvoice(api.ours));
+  const payer = { accessId: newId(), name: 'Payer', email: '', returnUrl: () => 'http://127.0.0.1/back' };
+  const row = await api.platform.database.transaction(() =>
+    api.app.invoices.checkouts.begin(api.ours.id, invoiceId, payer),
+  );
+  return { invoiceId, clientId, checkoutId: row.id, sessionId: row.sessionId ?? '', url: row.url ?? '' };
+}
+
+const ask = async (checkoutId: string): Promise<Checkout> =>
+  (await api.as('office').call(askCheckout, { params: { checkoutId } })).body as Checkout;
+const openOf = async (invoiceId: string) => (await readBack(api.ours, invoiceId)).open_minor;
+const paymentsOf = async (clientId: string): Promise<Payment[]> =>
+  ((await api.as('office').call(listPayments, { query: { clientId } })).body as { items: Payment[] }).items;
+const rowsOf = async () => {
+  const [row] = await api.platform.database.select<{ events: number; payments: number }>(
+    'SELECT (SELECT COUNT(*) FROM payment_events) AS events, (SELECT COUNT(*) FROM payments) AS payments',
+  );
+  return row;
+};
+
+describe('a payment by card', () => {
+  it('is recorded by its event, and a receipt goes out', async () => {
+    const { invoiceId, clientId, sessionId, checkoutId } = await begun();
+    await api.standIn.pay(sessionId);
+    expect(await openOf(invoiceId)).toBe(0);
+    expect(await paymentsOf(clientId)).toMatchObject([{ way: 'card', amount_minor: 12_000, credit_minor: 0 }]);
+    expect(await ask(checkoutId)).toMatchObject({ state: 'paid', open_minor: 0, url: null });
+    expect((await api.mails())[0].headers).toContain('Receipt for invoice');
+  });
+
+  it('is recorded by asking where no event ever comes, and once where it comes late', async () => {
+    const { invoiceId, clientId, sessionId, checkoutId } = await begun();
+    expect(await ask(checkoutId)).toMatchObject({ state: 'open', open_minor: 12_000 });
+    const session = await api.standIn.pay(sessionId, false);
+    expect(await openOf(invoiceId)).toBe(12_000);
+    expect(await ask(checkoutId)).toMatchObject({ state: 'paid', open_minor: 0 });
+    expect((await post(api.standIn.signed('checkout.session.completed', session))).status).toBe(204);
+    expect(await paymentsOf(clientId)).toHaveLength(1);
+  });
+
+  it('is one payment when one event comes a hundred times at once', async () => {
+    const { clientId, sessionId } = await begun();
+    const session = await api.standIn.pay(sessionId, false);
+    const event = api.standIn.signed('checkout.session.completed', session);
+    const answers = await Promise.all(Array.from({ length: 100 }, () => post(event)));
+    expect(answers.filter(({ status }) => status !== 204)).toEqual([]);
+    expect(await paymentsOf(clientId)).toHaveLength(1);
+  }, 120_000);
+
+  it('is one payment when it is asked about and told of by different events at the same moment', async () => {
+    const { clientId, sessionId, checkoutId } = await begun();
+    const session = await api.standIn.pay(sessionId, false);
+    const told = [
+      'checkout.session.completed',
+      'checkout.session.async_payment_succeeded',
+      'checkout.session.completed',
+    ];
+    await Promise.all([
+      ...told.map((kind) => post(api.standIn.signed(kind, session))),
+      ask(checkoutId),
+      ask(checkoutId),
+    ]);
+    expect(await paymentsOf(clientId)).toHaveLength(1);
+  });
+
+  it('ends right whatever order its events come in: given back, expired, completed', async () => {
+    const { invoiceId, clientId, sessionId, checkoutId } = await begun();
+    const session = await api.standIn.pay(sessionId, false);
+    const refund = api.standIn.ledger.refund({ payment_intent: session.payment_intent ?? '', amount: '2000' });
+    for (const [kind, object] of [
+      ['refund.created', { ...refund, metadata: { checkoutId } }],
+      ['checkout.session.expired', { ...session, status: 'expired' }],
+      ['checkout.session.completed', session],
+    ] as const)
+      expect((await post(api.standIn.signed(kind, object))).status).toBe(204);
+    expect((await paymentsOf(clientId)).map(({ amount_minor }) => amount_minor)).toEqual([-2_000, 12_000]);
+    expect(await openOf(invoiceId)).toBe(2_000);
+    expect(await ask(checkoutId)).toMatchObject({ state: 'paid' });
+  });
+
+  it('over an invoice that was paid meanwhile is kept to the client’s credit', async () => {
+    const sample = await begun();
+    const entry = await paymentOf(api.ours, api, { ...sample, amount_minor: 5_000 });
+    expect((await api.as('office').call(recordPayment, { body: entry, key: randomUUID() })).status).toBe(200);
+    await api.standIn.pay(sample.sessionId);
+    expect(await openOf(sample.invoiceId)).toBe(0);
+    const [card] = await paymentsOf(sample.clientId);
+    expect(card).toMatchObject({ way: 'card', amount_minor: 12_000, credit_minor: 5_000 });
+    expect((await api.as('office').call(readOwed)).text).toContain(sample.clientId);
+  });
+
+  it('goes on where it was begun over the same amount, and begins anew over another', async () => {
+    const first = await begun();
+    const again = await begun(first);
+    expect(again.checkoutId).toBe(first.checkoutId);
+    const entry = await paymentOf(api.ours, api, { ...first, amount_minor: 5_000 });
+    await api.as('office').call(recordPayment, { body: entry, key: randomUUID() });
+    const anew = await begun(first);
+    expect(anew.checkoutId).not.toBe(first.checkoutId);
+    expect(api.standIn.ledger.session(first.sessionId)?.status).toBe('expired');
+    expect(api.standIn.ledger.session(anew.sessionId)?.amount_total).toBe(7_000);
+  });
+
+  it('is given back through the service, once however often it is asked', async () => {
+    const { clientId, invoiceId, sessionId } = await begun();
+    await api.standIn.pay(sessionId);
+    const [payment] = await paymentsOf(clientId);
+    const body = {
+      refundId: newId(),
+      amount_minor: 12_000,
+      refundedOn: payment.receivedOn,
+      reference: '',
+      reopens: true,
+    };
+    const refund = () =>
+      api.as('office').call(refundPayment, { params: { paymentId: payment.id }, body, key: randomUUID() });
+    expect((await refund()).status).toBe(200);
+    expect((await refund()).status).toBe(200);
+    await api.standIn.quiet();
+    expect((await paymentsOf(clientId)).map(({ amount_minor }) => amount_minor)).toEqual([-12_000, 12_000]);
+    expect(await openOf(invoiceId)).toBe(12_000);
+  });
+
+  it('that the service cannot be asked about changes nothing and says so', async () => {
+    const { checkoutId } = await begun();
+    await api.platform.database.execute("UPDATE checkouts SET session_id = 'cs_test_gone' WHERE id = :checkoutId", {
+      checkoutId,
+    });
+    const response = await api.as('office').call(askCheckout, { params: { checkoutId } });
+    expect(response.status).toBe(503);
+    expect(response.headers['retry-after']).toBe('10');
+  });
+});
+
+describe('an event', () => {
+  const seconds = (instant: Date) => Math.floor(instant.getTime() / 1_000);
+
+  async function bent(): Promise<[string, Signed][]> {
+    const { sessionId } = await begun();
+    const session = await api.standIn.pay(sessionId, false);
+    const { bytes, signature } = api.standIn.signed('checkout.session.completed', session);
+    const signer = new Stripe('sk_test_of_the_tests');
+    const at = (timestamp: number, secret = api.standIn.webhookSecret) => ({
+      bytes,
+      signature: signer.webhooks.generateTestHeaderString({ payload: bytes.toString('utf8'), secret, timestamp }),
+    });
+    const now = seconds(api.clock.now());
+    return [
+      ['a changed byte', { bytes: Buffer.from(bytes.toString('utf8').replace('12000', '12001')), signature }],
+      ['an old time', at(now - 301)],
+      ['a time to come', at(now + 302)],
+      ['no signature', { bytes, signature: '' }],
+      ['half a signature', { bytes, signature: signature.slice(0, -10) }],
+      ['another secret', at(now, 'whsec_of_somebody_else_altogether')],
+      ['nothing at all', { bytes: Buffer.from(''), signature }],
+    ];
+  }
+
+  it('whose signature does not fit is refused, and leaves no row', async () => {
+    const all = await bent();
+    const before = await rowsOf();
+    for (const [what, signed] of all) expect([what, (await post(signed)).status]).toEqual([what, 400]);
+    expect(await rowsOf()).toEqual(before);
+  });
+
+  it('of a kind nobody knows, and about nothing of ours, is kept and does nothing', async () => {
+    const before = await rowsOf();
+    const unknown = api.standIn.signed('invoice.sang_a_song', { id: 'x', object: 'song' });
+    const strange = api.standIn.signed('checkout.session.completed', {
+      id: 'cs_other',
+      object: 'checkout.session',
+      metadata: null,
+    });
+    expect([(await post(unknown)).status, (await post(strange)).status]).toEqual([204, 204]);
+    const after = await rowsOf();
+    expect([Number(after.events) - Number(before.events), after.payments]).toEqual([2, before.payments]);
+  });
+});
+
+describe('a client', () => {
+  it('sees their own invoice, pays it by card and comes back to what is true', async () => {
+    const { jobId, issueId, visitor } = await acceptedIssue(api.ours, api);
+    const { id: invoiceId, due_minor } = await stageInvoice(
+      api.ours,
+      { jobId, issueId },
+      { of: 'work', from_percent: '0', to_percent: '30' },
+    );
+    const list = await visitor.call(listClientInvoices);
+    expect(list.body).toMatchObject({
+      items: [{ id: invoiceId, open_minor: due_minor, mayPayByCard: true, papers: ['invoice.pdf', 'invoice.xml'] }],
+    });
+    const checkout = (await visitor.call(beginClientCheckout, { params: { invoiceId } })).body as Checkout;
+    expect(checkout).toMatchObject({ state: 'open', amount_minor: due_minor });
+    const page = await fetch(checkout.url ?? '');
+    expect(await page.text()).toContain('no money moves');
+    const paid = await fetch(checkout.url ?? '', {
+      method: 'POST',
+      body: new URLSearchParams({ answer: 'pay' }),
+      redirect: 'manual',
+    });
+    expect(paid.headers.get('location')).toMatch(new RegExp(`/client/payments/${checkout.id}$`));
+    const back = await visitor.call(askClientCheckout, { params: { checkoutId: checkout.id } });
+    expect(back.body).toMatchObject({ state: 'paid', open_minor: 0 });
+  });
+
+  it('cannot begin to pay what is not theirs, or is not open', async () => {
+    const { jobId, issueId, visitor } = await acceptedIssue(api.ours, api);
+    const { invoiceId } = await sampleInvoice(api.ours);
+    expect((await visitor.call(beginClientCheckout, { params: { invoiceId } })).status).toBe(404);
+    const own = await stageInvoice(api.ours, { jobId, issueId }, { of: 'work', from_percent: '0', to_percent: '30' });
+    const { url } = (await visitor.call(beginClientCheckout, { params: { invoiceId: own.id } })).body as Checkout;
+    await api.standIn.pay((url ?? '').split('/').at(-1) ?? '');
+    const again = await visitor.call(beginClientCheckout, { params: { invoiceId: own.id } });
+    expect(again.body).toMatchObject({ type: 'urn:problem:checkout-nothing-open' });
+  });
+});

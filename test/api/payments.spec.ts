@@ -1,0 +1,249 @@
+import { randomUUID } from 'node:crypto';
+import { Workbook } from 'exceljs';
+import { v7 as newId } from 'uuid';
+import type { Journal, Payment, Statement } from '#shared/invoices/payment-schema';
+import {
+  readJournal,
+  readJournalFile,
+  readOwed,
+  readStatement,
+  readStatementPaper,
+  remindOfInvoice,
+} from '#shared/invoices/owed-endpoints';
+import { recordPayment, refundPayment, sharePayment, writeOff } from '#shared/invoices/payments-endpoints';
+import { ledgerFaults } from './ledger';
+import { creditDraft, issued, paymentOf, readBack, sampleDraft, sampleInvoice } from './sample-invoice';
+import { startApi, type Api } from './start-api';
+
+let api: Api;
+beforeAll(async () => {
+  api = await startApi();
+}, 60_000);
+afterEach(async () => expect(await ledgerFaults(api.platform.database)).toEqual([]));
+afterAll(() => api.stop());
+
+type Entry = Awaited<ReturnType<typeof paymentOf>>;
+const pay = (body: Entry, key = randomUUID()) => api.as('office').call(recordPayment, { body, key });
+const entryFor = (sample: { clientId: string; invoiceId: string }, amount_minor: number) =>
+  paymentOf(api.ours, api, { ...sample, amount_minor });
+const typeOf = (response: { body: unknown }) => (response.body as { type: string }).type;
+const wide = { from: '2020-01-01', to: '2099-12-31' };
+
+const binary = (response: NodeJS.ReadableStream, done: (error: Error | null, body: Buffer) => void): void => {
+  const parts: Buffer[] = [];
+  response.on('data', (part: Buffer) => parts.push(part));
+  response.on('end', () => done(null, Buffer.concat(parts)));
+};
+
+describe('a payment', () => {
+  it('comes in parts until nothing is open', async () => {
+    const sample = await sampleInvoice(api.ours);
+    expect((await pay(await entryFor(sample, 5_000))).status).toBe(200);
+    expect(await readBack(api.ours, sample.invoiceId)).toMatchObject({ open_minor: 7_000 });
+    expect((await pay(await entryFor(sample, 7_000))).status).toBe(200);
+    expect(await readBack(api.ours, sample.invoiceId)).toMatchObject({ open_minor: 0 });
+    expect(typeOf(await pay(await entryFor(sample, 1)))).toBe('urn:problem:payment-over-invoice');
+  });
+
+  it('beyond what is open is refused, or kept to the client’s credit and used for another invoice, as is said', async () => {
+    const sample = await sampleInvoice(api.ours);
+    const over = { ...(await entryFor(sample, 12_000)), amount_minor: 15_000 };
+    expect(typeOf(await pay(over))).toBe('urn:problem:payment-over');
+    const kept = (await pay({ ...over, surplus: 'keep' })).body as Payment;
+    expect(kept.credit_minor).toBe(3_000);
+    const { invoiceId } = await sampleInvoice(api.ours, { clientId: sample.clientId });
+    const share = (amount_minor: number) =>
+      api
+        .as('office')
+        .call(sharePayment, { params: { paymentId: kept.id }, body: { invoiceId, amount_minor }, key: randomUUID() });
+    expect(typeOf(await share(3_001))).toBe('urn:problem:payment-no-credit');
+    expect((await share(3_000)).body).toMatchObject({ credit_minor: 0 });
+    expect(await readBack(api.ours, invoiceId)).toMatchObject({ open_minor: 9_000 });
+  });
+
+  it('is refused on a draft, on a credit note, for another client’s invoice, in foreign money, from the future, over its own amount', async () => {
+    const draft = await sampleDraft(api.ours);
+    expect((await pay(await entryFor(draft, 100))).status).toBe(409);
+    const sample = await sampleInvoice(api.ours);
+    const note = await issued(api.ours, (await creditDraft(api.ours, sample.invoiceId)).id);
+    expect(typeOf(await pay(await entryFor({ ...sample, invoiceId: note.id }, 100)))).toBe(
+      'urn:problem:payment-not-invoice',
+    );
+    const open = await sampleInvoice(api.ours);
+    const other = await sampleInvoice(api.ours);
+    const entry = await entryFor(open, 100);
+    expect(typeOf(await pay({ ...entry, clientId: other.clientId }))).toBe('urn:problem:payment-other-client');
+    const foreign = await pay({ ...entry, currency: 'USD' });
+    expect(foreign.status).toBe(400);
+    expect(foreign.body).toMatchObject({
+      errors: [{ path: ['currency'], message: expect.stringContaining('EUR') as string }],
+    });
+    expect((await pay({ ...entry, receivedOn: '2099-01-01' })).status).toBe(400);
+    expect((await pay({ ...entry, amount_minor: 99 })).status).toBe(400);
+    for (const amount_minor of [-1, 0, 1.5, 1e308, 2 ** 53])
+      expect((await pay({ ...entry, amount_minor })).status).toBe(400);
+    expect(await readBack(api.ours, open.invoiceId)).toMatchObject({ open_minor: 12_000 });
+  });
+
+  it('is taken once of fifty who pay the same invoice at the same moment', async () => {
+    const sample = await sampleInvoice(api.ours);
+    const entry = await entryFor(sample, 12_000);
+    const answers = await Promise.all(Array.from({ length: 50 }, () => pay(entry)));
+    expect(answers.filter(({ status }) => status === 200)).toHaveLength(1);
+    expect(answers.filter(({ status }) => status !== 200 && status !== 409)).toEqual([]);
+  }, 120_000);
+
+  it('sent again under its key is one payment; another one under the same key is refused with 422', async () => {
+    const sample = await sampleInvoice(api.ours);
+    const [entry, key] = [await entryFor(sample, 1_000), randomUUID()];
+    const first = await pay(entry, key);
+    expect((await pay(entry, key)).text).toBe(first.text);
+    expect((await pay(await entryFor(sample, 2_000), key)).status).toBe(422);
+    expect(await readBack(api.ours, sample.invoiceId)).toMatchObject({ open_minor: 11_000 });
+  });
+});
+
+describe('what is given back', () => {
+  const refund = (paymentId: string, amount_minor: number, more: object = {}) =>
+    api.as('office').call(refundPayment, {
+      params: { paymentId },
+      body: { refundId: newId(), amount_minor, refundedOn: '2026-01-01', reference: '', reopens: false, ...more },
+      key: randomUUID(),
+    });
+
+  it('comes out of credit first; what invoices hold only when that is meant', async () => {
+    const sample = await sampleInvoice(api.ours);
+    const entry = { ...(await entryFor(sample, 12_000)), amount_minor: 13_000, surplus: 'keep' } as const;
+    const { id } = (await pay(entry)).body as Payment;
+    expect((await refund(id, 400)).body).toMatchObject({ amount_minor: -400, refundsPaymentId: id });
+    expect(typeOf(await refund(id, 700))).toBe('urn:problem:refund-reopens');
+    expect((await refund(id, 700, { reopens: true })).status).toBe(200);
+    expect(await readBack(api.ours, sample.invoiceId)).toMatchObject({ open_minor: 100 });
+    expect(typeOf(await refund(id, 11_901, { reopens: true }))).toBe('urn:problem:refund-over');
+  });
+
+  it('after a credit note on a paid invoice is the client’s credit', async () => {
+    const sample = await sampleInvoice(api.ours);
+    const { id } = (await pay(await entryFor(sample, 12_000))).body as Payment;
+    await issued(api.ours, (await creditDraft(api.ours, sample.invoiceId)).id);
+    expect(await readBack(api.ours, sample.invoiceId)).toMatchObject({ open_minor: 0, credited_minor: 12_000 });
+    expect((await refund(id, 12_000)).status).toBe(200);
+  });
+
+  it('is one refund when it is asked for twice by the same id', async () => {
+    const sample = await sampleInvoice(api.ours);
+    const { id } = (await pay(await entryFor(sample, 12_000))).body as Payment;
+    const refundId = newId();
+    const first = await refund(id, 12_000, { refundId, reopens: true });
+    const second = await refund(id, 12_000, { refundId, reopens: true });
+    expect(second.body).toEqual(first.body);
+  });
+});
+
+describe('writing off', () => {
+  it('is the owner’s, up to what is open, and leaves that much less to credit', async () => {
+    const sample = await sampleInvoice(api.ours);
+    const params = { invoiceId: sample.invoiceId };
+    const off = (role: 'owner' | 'office', amount_minor: number) =>
+      api.as(role).call(writeOff, { params, body: { amount_minor, reason: 'Gone abroad' }, key: randomUUID() });
+    expect((await off('office', 100)).status).toBe(403);
+    expect((await off('owner', 12_001)).status).toBe(409);
+    expect((await off('owner', 2_000)).body).toMatchObject({ open_minor: 10_000 });
+    const note = await creditDraft(api.ours, sample.invoiceId);
+    const key = randomUUID();
+    const { issueInvoice } = await import('#shared/invoices/invoices-endpoints');
+    const over = await api
+      .as('owner')
+      .call(issueInvoice, { params: { invoiceId: note.id }, body: { version: 1 }, key });
+    expect(typeOf(over)).toBe('urn:problem:invoice-credit-over');
+  });
+});
+
+describe('what is owed', () => {
+  it('agrees by client and age, in statement and journal, to the cent', async () => {
+    const sample = await sampleInvoice(api.ours);
+    await pay(await entryFor(sample, 2_000));
+    const owed = (await api.as('office').call(readOwed)).body as {
+      items: { clientId: string; open_minor: number }[];
+      open_minor: number;
+    };
+    expect(owed.items.find(({ clientId }) => clientId === sample.clientId)).toMatchObject({
+      open_minor: 10_000,
+      byAge_minor: { 'not-due': 10_000 },
+    });
+    const call = { params: { clientId: sample.clientId }, query: wide };
+    const statement = (await api.as('office').call(readStatement, call)).body as Statement;
+    expect(statement).toMatchObject({ opening_minor: 0, closing_minor: 10_000 });
+    expect(statement.lines.map(({ kind, balance_minor }) => [kind, balance_minor])).toEqual([
+      ['invoice', 12_000],
+      ['payment', 10_000],
+    ]);
+    const paper = await api
+      .as('office')
+      .call(readStatementPaper, call)
+      .buffer(true)
+      .parse(binary as never);
+    expect((paper.body as Buffer).subarray(0, 5).toString()).toBe('%PDF-');
+    const journal = (await api.as('office').call(readJournal, { query: wide })).body as Journal;
+    const credit = owed.items.reduce((sum, one) => sum + (one as unknown as { credit_minor: number }).credit_minor, 0);
+    expect(journal.totals.reduce((sum, { amount_minor }) => sum + amount_minor, 0)).toBe(owed.open_minor - credit);
+  });
+
+  it('goes to the accountant as a list and a workbook whose sums are those of the entries, and no text is a formula', async () => {
+    const clientName = '=HYPERLINK("http://evil.example")';
+    const { enterClient, clientNamed } = await import('./sample-job');
+    const clientId = await enterClient(api.as('owner'), clientNamed(clientName));
+    const sample = await sampleInvoice(api.ours, { clientId });
+    await pay({ ...(await entryFor(sample, 100)), reference: '@SUM(A1)' });
+    const file = (form: string) =>
+      api
+        .as('office')
+        .call(readJournalFile, { params: { form }, query: wide })
+        .buffer(true)
+        .parse(binary as never);
+    const csv = ((await file('journal.csv')).body as Buffer).toString('utf8');
+    const rows = csv
+      .replace(/^\ufeff/, '')
+      .trim()
+      .split('\r\n');
+    expect(csv).toContain('"\'=HYPERLINK');
+    expect(csv).toContain("'@SUM");
+    const amounts = rows.map((row) => [row, Number(/(-?[\d.]+)$/.exec(row)?.[1])] as const).slice(1);
+    const entries = amounts.filter(([row]) => /^\d{4}-/.test(row));
+    const cents = (list: readonly (readonly [string, number])[]) =>
+      list.reduce((sum, [, amount]) => sum + Math.round(amount * 100), 0);
+    expect(cents(amounts.slice(-1))).toBe(cents(entries));
+    const workbook = new Workbook();
+    await workbook.xlsx.load((await file('journal.xlsx')).body as never);
+    const [sheet] = workbook.worksheets;
+    const last = sheet.getRow(sheet.rowCount).getCell(8).value as { formula: string; result: number };
+    expect(last.formula).toMatch(/^SUM\(/);
+    expect(Math.round(last.result * 100)).toBe(cents(entries));
+  });
+
+  it('is reminded of by mail once it is overdue, and not before', async () => {
+    const sample = await sampleInvoice(api.ours);
+    const remind = () =>
+      api
+        .as('office')
+        .call(remindOfInvoice, { params: { invoiceId: sample.invoiceId }, body: { note: '' }, key: randomUUID() });
+    expect(typeOf(await remind())).toBe('urn:problem:reminder-not-due');
+    const days = 15 * 24 * 60;
+    api.clock.move({ minutes: days });
+    const { reading } = api.app.invoices;
+    const actor = api.ours.people.office.actor;
+    const later = await reading.get(api.ours.id, sample.invoiceId);
+    expect(later.isOverdue).toBe(true);
+    const fresh = await api.newcomer(api.ours, 'office');
+    const sent = await fresh.visitor.call(remindOfInvoice, {
+      params: { invoiceId: sample.invoiceId },
+      body: { note: 'Kindly' },
+      key: randomUUID(),
+    });
+    expect([sent.status, actor.workshopId]).toEqual([204, api.ours.id]);
+    const [mail] = await api.mails();
+    api.clock.move({ minutes: -days });
+    expect(mail.headers).toContain('is still open');
+    expect(mail.text).toContain('Kindly');
+  });
+});
