@@ -8,6 +8,7 @@ import {
   type DemonstrationPerson,
 } from './demonstration-people';
 import { seedJob } from './seed-job';
+import { seedShop } from './seed-programme';
 
 async function welcome(app: App, person: DemonstrationPerson, password: string) {
   const entry = { name: person.name, email: person.email, password, address: 'demonstration' };
@@ -36,6 +37,7 @@ export function seedDemonstration(app: App, { database }: Platform, password: st
   return database.transaction(async () => {
     if (await app.accounts.isAnyFounded()) return false;
     const owner = await foundWorkshop(app, password);
+    await seedShop(app, owner);
     for (const job of demonstrationJobs()) await seedJob(app, owner, job);
     return true;
   });

@@ -5,6 +5,7 @@ import type { EstimateSettings } from '#shared/estimates/settings';
 import type { App } from '../backend/src/app';
 import { keptMembers, keptPieces, settingsOfJob } from './demonstration-draft';
 import type { DemonstrationJob } from './demonstration-job';
+import { seedPlan } from './seed-programme';
 import { seedClientSide } from './seed-client-side';
 
 interface Begun {
@@ -42,11 +43,13 @@ async function issueFirst(app: App, actor: Actor, at: { id: string; job: Demonst
   if (job.stands !== 'issued') await seedClientSide(app, actor, { issueId: issue.id, jobId: estimate.jobId, job });
 }
 
-/** Enters a job with its client and estimate through the services, and brings its issue A to where it stands; answers the estimate's id. */
+/** Enters a job with its client and estimate through the services, plans it, and brings its issue A to where it stands; answers the estimate's id. */
 export async function seedJob(app: App, actor: Actor, job: DemonstrationJob): Promise<string> {
   const begun = await openJob(app, actor, job);
   await app.estimates.drafts.change(actor, begun.id, entries(job, begun));
+  await seedPlan(app, actor, begun.id);
   await issueFirst(app, actor, { id: begun.id, job });
+  if (job.stands === 'sent') await app.programme.holds.hold(actor, begun.id);
   const later = laterEntries(job);
   if (later.length > 0) await app.estimates.drafts.change(actor, begun.id, later);
   return begun.id;
