@@ -1,5 +1,5 @@
 import { seededGenerator, type Generator32 } from '#shared/estimates/risk/seeded-generator';
-import { serialResult, type BlockedNetwork } from '#shared/programme/block-order';
+import { serialResult, type BlockedNetwork, type PlanHints } from '#shared/programme/block-order';
 import { mirroredNetwork } from '#shared/programme/mirrored-network';
 import type { SearchLimit } from '#shared/programme/project';
 import { taskBlocks } from '#shared/programme/task-blocks';
@@ -27,6 +27,8 @@ export interface Improving {
   /** The lot of each task. */
   readonly lots: readonly string[];
   readonly onBetter: (plan: NetworkPlan) => void;
+  /** What stands all the same. */
+  readonly hints?: PlanHints;
 }
 
 /** Tries without a limit of the asker's. */
@@ -90,11 +92,8 @@ export function improvedPlan(
   while (best.finish > bound && plans < most && !limit.shouldStop?.()) {
     plans += 1;
     const order = isSettled ? null : justified(blocked, backward, current);
-    const { positions } = serialResult(
-      blocked,
-      order ??
-        shaken(best, { share: shares[plans % shares.length], lots: plans % 2 === 0 ? improving.lots : null }, next),
-    );
+    const shake = { share: shares[plans % shares.length], lots: plans % 2 === 0 ? improving.lots : null };
+    const { positions } = serialResult(blocked, order ?? shaken(best, shake, next), improving.hints);
     isSettled = !positions;
     if (!positions) continue;
     const plan = networkPlan(positions);

@@ -1,4 +1,5 @@
 import { firstPosition } from '#shared/programme/earliest-times';
+import { holdStretch, type HoldLengths, type HoldState } from '#shared/programme/place-room';
 import {
   pointOf,
   type Crew,
@@ -50,28 +51,31 @@ function peopleBreaches({ people }: TaskNetwork, positions: Positions): PlanBrea
   });
 }
 
-function placeBreaches({ places }: TaskNetwork, positions: Positions): PlanBreach[] {
+function placeBreaches({ places }: TaskNetwork, positions: Positions, lengths: HoldLengths): PlanBreach[] {
   return places.flatMap((place, at) =>
     place.holds.flatMap(({ from }): PlanBreach[] => {
       const start = positions[from]?.start;
-      return start !== undefined && usedAt(place, positions, start) > place.capacity
+      return start !== undefined && usedAt(place, { positions, lengths }, start) > place.capacity
         ? [{ kind: 'place', task: from, place: at }]
         : [];
     }),
   );
 }
 
-function usedAt({ taken, holds }: NetworkPlace, positions: Positions, moment: number): number {
-  const elsewhere = taken.filter(({ start, end }) => start <= moment && moment < end);
-  const here = holds.filter((hold) => {
-    const start = positions[hold.from]?.start ?? Infinity;
-    return start <= moment && moment < (positions[hold.until]?.end ?? Infinity);
-  });
-  return [...elsewhere, ...here].reduce((sum, { amount }) => sum + amount, 0);
+function usedAt({ taken, holds }: NetworkPlace, { positions, lengths }: HoldState, moment: number): number {
+  const held = holds.map((hold) => holdStretch(hold, positions, lengths)).filter((stretch) => stretch !== null);
+  return [...taken, ...held].reduce(
+    (sum, { start, end, amount }) => (start <= moment && moment < end ? sum + amount : sum),
+    0,
+  );
 }
 
-/** Everything that positions break; a task without a place has no hours for it. Moments in minutes. */
-export function planBreaches(network: TaskNetwork, positions: Positions): PlanBreach[] {
+/** Everything that positions break; a task without a place has no hours for it, and what it would end lasts as long as is said. Moments in minutes. */
+export function planBreaches(
+  network: TaskNetwork,
+  positions: Positions,
+  lengths: HoldLengths = new Map(),
+): PlanBreach[] {
   const own = network.tasks.flatMap(({ release, anchor }, task): PlanBreach[] => {
     const position = positions[task];
     if (!position) return [{ kind: 'hours', task }];
@@ -81,6 +85,6 @@ export function planBreaches(network: TaskNetwork, positions: Positions): PlanBr
     ...own,
     ...lagBreaches(network, positions),
     ...peopleBreaches(network, positions),
-    ...placeBreaches(network, positions),
+    ...placeBreaches(network, positions, lengths),
   ];
 }

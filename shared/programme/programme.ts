@@ -11,7 +11,7 @@ import type { ProgrammeRequest, ProgrammeSearch } from '#shared/programme/progra
 import { projectSchedule } from '#shared/programme/project-schedule';
 import { described, noPlan } from '#shared/programme/described-programme';
 import { firstResult, type RequestNetwork } from '#shared/programme/request-network';
-import { replannedFrom } from '#shared/programme/replanned-from';
+import { replannedFrom, worth_minutes } from '#shared/programme/replanned-from';
 import { positionsOf } from '#shared/programme/standing-positions';
 import type { Position, TaskNetwork } from '#shared/programme/task-network';
 
@@ -48,12 +48,16 @@ const usualNodes = 20_000;
 const better = (one: NetworkPlan | null, other: NetworkPlan | null): NetworkPlan | null =>
   one && other ? (other.finish < one.finish ? other : one) : (one ?? other);
 
+/** Where much has to move anyway it is tried so often to end sooner all the same, unless the asker sets a limit. */
+const triesForStable = 5;
+
 function planned(ready: RequestNetwork, first: NetworkPlan, search: ProgrammeSearch): Programme {
   const kept = keptPlan(ready, search.incumbent);
   const stable = search.previous ? replannedFrom(ready, search.previous) : null;
-  const start = better(kept, stable ?? first) ?? first;
+  const start = better(kept, stable?.plan ?? first) ?? first;
   const bound = networkBound(ready.network, ready.earliest, start.finish);
-  if (stable) return described(ready, start, { bound, plans: 1 });
+  if (stable && start.finish <= (search.previous?.finish_minutes ?? 0) + worth_minutes)
+    return described(ready, start, { bound, plans: 1 });
   const onBetter = (plan: NetworkPlan): void => search.onBetter?.(described(ready, plan, { bound, plans: 0 }));
   onBetter(start);
   const improving = {

@@ -19,7 +19,7 @@ function holdLengths({ request, network }: RequestNetwork, { tasks }: Programme)
 }
 
 /** A finish so much later is worth it that nobody's plan is shuffled. */
-const worth_minutes = 1440;
+export const worth_minutes = 1440;
 
 /** Who did each task, where the same people would do again. */
 function samePeople({ request }: RequestNetwork, { tasks }: Programme): PlanHints['preferred'] {
@@ -36,20 +36,30 @@ function inOrder(ready: RequestNetwork, previous: Programme, standing: readonly 
   return { order, standing: standing.map((position) => (position && position.start < first ? position : null)) };
 }
 
+/** A plan that moves little, and what has to stand if it is to end sooner by moving more: all up to the first move. */
+export interface Replanned {
+  readonly plan: NetworkPlan;
+  readonly hints: PlanHints;
+}
+
 /**
  * An earlier plan with new places for what has to move: round all that may stand, or, where that ends more than a day later, with all that comes after the first
  * move put off in its old order. Null where neither comes to a plan.
  */
-export function replannedFrom(ready: RequestNetwork, previous: Programme): NetworkPlan | null {
-  const standing = standingPositions(ready, previous);
-  const hints = { preferred: samePeople(ready, previous), lengths: holdLengths(ready, previous) };
+export function replannedFrom(ready: RequestNetwork, previous: Programme): Replanned | null {
+  const lengths = holdLengths(ready, previous);
+  const standing = standingPositions(ready, previous, lengths);
+  const hints = { preferred: samePeople(ready, previous), lengths };
   const plan = (order: readonly number[], stands: readonly (Position | null)[]): NetworkPlan | null => {
     const { positions } = serialResult(ready, order, { ...hints, standing: stands });
     return positions && planBreaches(ready.network, positions).length === 0 ? networkPlan(positions) : null;
   };
   const quiet = plan(latestFirst(ready), standing);
-  if (quiet && quiet.finish <= (previous.finish_minutes ?? -Infinity)) return quiet;
   const later = inOrder(ready, previous, standing);
+  const told = (chosen: NetworkPlan | null): Replanned | null =>
+    chosen && { plan: chosen, hints: { ...hints, standing: later.standing } };
+  if (quiet && quiet.finish <= (previous.finish_minutes ?? -Infinity)) return told(quiet);
   const shifted = plan(later.order, later.standing);
-  return quiet && shifted ? (shifted.finish < quiet.finish - worth_minutes ? shifted : quiet) : (quiet ?? shifted);
+  const isWorth = quiet && shifted && shifted.finish < quiet.finish - worth_minutes;
+  return told(isWorth ? shifted : (quiet ?? shifted));
 }

@@ -1,4 +1,5 @@
 import { planBreaches, positionAt } from '#shared/programme/plan-breaches';
+import type { HoldLengths } from '#shared/programme/place-room';
 import type { PlannedTask, Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
 import type { Position, TaskNetwork } from '#shared/programme/task-network';
@@ -26,11 +27,11 @@ export function positionsOf(planned: Planned, plan: Programme): (Position | null
   );
 }
 
-/** Where an earlier plan puts tasks, without those that break something now: they and they alone have to move. */
-export function standingPositions(planned: Planned, plan: Programme): (Position | null)[] {
+/** Where an earlier plan puts tasks, without those that break something now: they and they alone have to move; `lengths` says how long each hold lasted. */
+export function standingPositions(planned: Planned, plan: Programme, lengths: HoldLengths): (Position | null)[] {
   const positions = positionsOf(planned, plan);
   for (;;) {
-    const breaches = planBreaches(planned.network, positions).filter(({ kind }) => kind !== 'hours');
+    const breaches = planBreaches(planned.network, positions, lengths).filter(({ kind }) => kind !== 'hours');
     const moved = new Set(breaches.map(({ task }) => task).filter((task) => !planned.network.tasks[task].anchor));
     // Where what breaks something stands fast itself, the other side gives way.
     for (const breach of breaches) if (breach.kind === 'lag' && moved.size === 0) moved.add(breach.arc.from);
