@@ -35,13 +35,13 @@ export interface HoldState {
 }
 
 /**
- * From when a place has room for a hold that begins at a moment or later and lasts as long as `length` (Infinity where its end is not known): the moment
+ * From when a place has room for a hold that begins at a moment or later and ends as `endOf` says (Infinity where that is not known): the moment
  * itself, a later one, or Infinity while somebody holds it without an end.
  */
 export function roomFrom(
   place: NetworkPlace,
   hold: NetworkHold,
-  at: HoldState & { readonly start: number; readonly length: number },
+  at: HoldState & { readonly start: number; readonly endOf: (start: number) => number },
 ): number {
   if (hold.amount > place.capacity) return Infinity;
   const others = stretches(place, hold, at).filter((one) => one.end > at.start);
@@ -49,7 +49,7 @@ export function roomFrom(
     others.reduce((sum, one) => (one.start <= moment && moment < one.end ? sum + one.amount : sum), 0);
   let start = at.start;
   for (;;) {
-    const end = start + at.length;
+    const end = at.endOf(start);
     const moments = [start, ...others.map((one) => one.start).filter((moment) => moment > start && moment < end)];
     const full = moments.find((moment) => used(moment) + hold.amount > place.capacity);
     if (full === undefined) return start;

@@ -166,8 +166,8 @@ export class SerialPlan {
     for (const { place, hold } of this.network.closes[task]) {
       const held = hold.from === task ? null : holdStretch(hold, this.positions, this.lengths);
       if (!held || !this.lengths.has(hold)) continue;
-      const length = held.end - held.start;
-      if (roomFrom(place, hold, { start: held.start, length, ...this.holds }) === held.start) continue;
+      const endOf = (): number => held.end;
+      if (roomFrom(place, hold, { start: held.start, endOf, ...this.holds }) === held.start) continue;
       const later = place.holds.filter((other) => {
         const start = this.positions[other.from]?.start ?? -Infinity;
         return (
@@ -182,8 +182,10 @@ export class SerialPlan {
   private placesFree(task: number, { start, end }: Bounds): number {
     let free = start;
     for (const { place, hold } of this.network.opens[task]) {
+      const ends = this.positions[hold.until]?.end;
       const length = hold.until === task ? end - start : (this.lengths.get(hold) ?? Infinity);
-      free = Math.max(free, roomFrom(place, hold, { start, length, ...this.holds }));
+      const endOf = (from: number): number => ends ?? from + length;
+      free = Math.max(free, roomFrom(place, hold, { start, endOf, ...this.holds }));
     }
     return free;
   }
