@@ -3,7 +3,12 @@ import { endpoint, sameForAll, sameForPriced } from '#shared/actor/endpoint';
 import { day, identifier } from '#shared/problems/entry-schema';
 import { benchDaySchema, benchTaskSchema, markSchema } from '#shared/programme/bench-day-schema';
 import { boardSchema } from '#shared/programme/board-schema';
-import { feedEntrySchema, feedSecret, feedSchema, newFeedSchema } from '#shared/programme/calendar-feed-schema';
+import {
+  feedEntrySchema,
+  feedSecret,
+  calendarFeedSchema,
+  newCalendarFeedSchema,
+} from '#shared/programme/calendar-feed-schema';
 
 const oneFeed = z.strictObject({ feedId: identifier });
 
@@ -45,7 +50,7 @@ export const listFeeds = endpoint({
   method: 'get',
   path: '/api/programme/feeds',
   callers: ['owner', 'estimator', 'office', 'bench'],
-  answers: sameForAll(z.strictObject({ items: z.array(feedSchema) })),
+  answers: sameForAll(z.strictObject({ items: z.array(calendarFeedSchema) })),
 });
 
 export const makeFeed = endpoint({
@@ -57,7 +62,7 @@ export const makeFeed = endpoint({
   callers: ['owner', 'estimator', 'office', 'bench'],
   params: oneFeed,
   body: feedEntrySchema,
-  answers: sameForAll(newFeedSchema),
+  answers: sameForAll(newCalendarFeedSchema),
 });
 
 export const revokeFeed = endpoint({
@@ -67,7 +72,7 @@ export const revokeFeed = endpoint({
   path: '/api/programme/feeds/:feedId',
   callers: ['owner', 'estimator', 'office', 'bench'],
   params: oneFeed,
-  answers: sameForAll(feedSchema),
+  answers: sameForAll(calendarFeedSchema),
 });
 
 export const readFeed = endpoint({

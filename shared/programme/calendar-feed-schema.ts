@@ -4,7 +4,7 @@ import { identifier, instant, line } from '#shared/problems/entry-schema';
 /** A calendar that other programs read: of one person, or of the whole workshop (null). */
 export const feedEntrySchema = z.strictObject({ name: line(80), personId: identifier.nullable() });
 
-export const feedSchema = z.strictObject({
+export const calendarFeedSchema = z.strictObject({
   id: identifier,
   name: z.string(),
   personId: z.string().nullable(),
@@ -13,10 +13,10 @@ export const feedSchema = z.strictObject({
   revokedAt: instant.nullable(),
   readAt: instant.nullable(),
 });
-export type Feed = z.infer<typeof feedSchema>;
+export type Feed = z.infer<typeof calendarFeedSchema>;
 
 /** Shown once: afterwards only its hash is known. */
-export const newFeedSchema = feedSchema.extend({ address: z.string() });
+export const newCalendarFeedSchema = calendarFeedSchema.extend({ address: z.string() });
 
 /** What a calendar's address is known by: 256 bits. */
 export const feedSecret = z.string().regex(/^[A-Za-z0-9_-]{43}$/);

@@ -1,13 +1,13 @@
 import type { EstimateWork } from '#shared/estimates/estimate-work';
 import type { Member } from '#shared/estimates/member';
 import { countUp } from '#shared/money/settled';
-import type { ItemTask, ProgrammePart } from '#shared/programme/lot-programme';
+import type { ItemTask, LotProgramme } from '#shared/programme/lot-programme';
 import type { ProgrammeLag } from '#shared/programme/programme-request';
 import { carvedTaskId, carvingTaskId } from '#shared/programme/task-id';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 
 /** The carving of one member before it is coated: its tasks, and the one whose end is the end of it all (null: nothing is carved). */
-export interface MemberCarving extends Pick<ProgrammePart, 'tasks' | 'lags'> {
+export interface MemberCarving extends LotProgramme {
   readonly memberId: string;
   readonly lastTaskId: string | null;
 }

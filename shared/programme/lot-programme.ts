@@ -1,5 +1,5 @@
 import type { ProgrammeItem } from '#shared/programme/programme-item';
-import type { ApprovalHold, PlaceHold, ProgrammeLag, ProgrammeTask } from '#shared/programme/programme-request';
+import type { ApprovalHold, ProgrammeLag, ProgrammeTask } from '#shared/programme/programme-request';
 import type { HoldPoint } from '#shared/buildups/buildup';
 
 /** A task with what it is for whoever reads it. */
@@ -13,10 +13,8 @@ export interface ProgrammeApproval extends ApprovalHold {
   readonly hold: HoldPoint;
 }
 
-/** The part of a request one lot, or the carving of one member, brings. */
-export interface ProgrammePart {
+/** The tasks one lot, or the carving of one member, brings to a programme, and the lags between them. */
+export interface LotProgramme {
   readonly tasks: readonly ItemTask[];
   readonly lags: readonly ProgrammeLag[];
-  readonly approvals: readonly ProgrammeApproval[];
-  readonly placeHolds: readonly PlaceHold[];
 }

@@ -1,6 +1,6 @@
 import type { Day } from '#shared/calendar/day';
 import { dayOfInstant } from '#shared/calendar/day-of-instant';
-import { startOfDay_ms } from '#shared/programme/zone-days';
+import { startOfDay_ms } from '#shared/programme/odd-days';
 
 /** What the minutes of a programme are counted from: the start of a day in a workshop's IANA zone. They run on through every change of the clocks. */
 export interface ProgrammeFrame {

@@ -4,7 +4,7 @@ import type { Weekday } from '#shared/calendar/working-days';
 import type { ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { Shop, ShopDays } from '#shared/programme/shop';
 import type { DayException, DayHours, ShopCalendar, WeekHours } from '#shared/programme/shop-calendar';
-import { oddDays } from '#shared/programme/zone-days';
+import { oddDays } from '#shared/programme/odd-days';
 
 /** How far ahead a calendar is laid out: six years and a half, in days. */
 export const calendarLength_days = 2400;

@@ -18,8 +18,9 @@ export interface FeedAsked {
 
 /** What a task is called for whoever sees nothing but a calendar. */
 function taskName(item: ProgrammeItem, say: FeedAsked['say']): string {
-  const { kind, name, portion, portions } = item;
-  const task = kind === 'carving' ? say('feed-carving', { member: name }) : name;
+  const { kind, name, coat, coats, portion, portions } = item;
+  const step = coats > 1 ? say('feed-coat', { step: name, coat, coats }) : name;
+  const task = kind === 'carving' ? say('feed-carving', { member: name }) : step;
   return portions > 1 ? say('feed-portion', { task, portion, portions }) : task;
 }
 

@@ -14,12 +14,9 @@ export const programmeBoard = {
     '{task} takes {crew, plural, one {one person} other {# people}} of {grade} at once, and there {people, plural, =0 {is nobody} one {is one} other {are #}}.',
   'programme-place-short':
     '{lot} takes {amount, plural, one {one place} other {# places}} of {place}, and there {capacity, plural, one {is one} other {are #}}.',
-  'programme-not-dry':
-    'In the air of {day} nothing of {lot} would dry, so the lot cannot be planned: {temperature_celsius} and {humidity_percent}.',
   'programme-in-portions':
     '{step} and what follows it are planned in {portions, plural, one {# portion} other {# portions}}, so that each stays inside its time.',
   'programme-no-plan': 'There is no plan yet.',
-  'programme-plan-none': 'This is no plan: nothing in it says when it ends.',
   'programme-plan-broken': 'The plan breaks what the programme asks for. What it breaks is listed with it.',
   'programme-breaks-hours': '{task} stands where its people do not work, or where it cannot be done in one go.',
   'programme-breaks-start': '{task} starts before it may.',
@@ -30,12 +27,10 @@ export const programmeBoard = {
   'programme-breaks-missing': '{task} is not in the plan.',
   'programme-breaks-unknown':
     'The plan holds {tasks, plural, one {a task} other {# tasks}} that are not in the programme any more.',
-  'programme-plan-outdated': 'Something the plan rests on has changed since: plan anew.',
   'programme-hold-not-sent': 'A slot is held for an issue that was sent. Mark the issue as sent first.',
   'programme-hold-over': 'The validity of issue {letter} ended on {until}: there is nothing to hold a slot for.',
   'programme-mark-future': 'This lies in the future.',
   'programme-mark-before-start': 'It cannot end before it was started.',
-  'programme-mark-not-planned': 'There is no plan of this task to be worked from yet.',
   'programme-mark-not-on-board': 'The job is not accepted, so nothing of it is worked yet.',
   'programme-assumes-people':
     'Assumed: {people, plural, one {one person} other {# people}} at work, {share_percent} of their hours productive.',
@@ -52,7 +47,6 @@ export const programmeBoard = {
     'Kept in hand before the day offered: {days, plural, one {one working day} other {# working days}}.',
   'programme-assumes-promised':
     'Planned around {jobs, plural, =0 {no other work} one {one other job} other {# other jobs}}.',
-  'what-if-set-up': 'Further hands: {days, plural, one {one day} other {# days}} set up at {hours_hours} each.',
   'history-shop-changed': 'Changed hours, places and people of the workshop',
   'history-programme-changed': 'Changed the programme of estimate {number}',
   'history-plan-kept': 'Planned estimate {number}: {starts} to {finishes}',
@@ -84,6 +78,4 @@ export const programmeBoard = {
   'feed-portion': '{task}, portion {portion, number} of {portions, number}',
   'feed-carving': 'Carving of {member}',
   'feed-lot': 'Lot: {lot}',
-  'feed-window': 'Has to be kept by {at}',
-  'feed-dry': 'Dry by {at}',
 } as const;

@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { addDays } from '#shared/calendar/add-days';
 import { dayOfInstant } from '#shared/calendar/day-of-instant';
 import { dayOfMinutes, instantOf, minutesOf, minutesOfDay, programmeFrame } from '#shared/programme/programme-frame';
-import { oddDays, startOfDay_ms } from '#shared/programme/zone-days';
+import { oddDays, startOfDay_ms } from '#shared/programme/odd-days';
 
 describe('The start of a day', () => {
   // Offsets as the IANA database has them: Dublin UTC+0, in summer +1; Vienna +1/+2; New York −5/−4; Kathmandu +5:45; Havana and Beirut change at midnight.
