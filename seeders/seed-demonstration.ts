@@ -7,6 +7,7 @@ import {
   demonstrationWorkshop,
   type DemonstrationPerson,
 } from './demonstration-people';
+import { seedInvoices } from './seed-invoices';
 import { seedJob } from './seed-job';
 import { seedShop } from './seed-programme';
 
@@ -33,12 +34,13 @@ async function foundWorkshop(app: App, password: string) {
 }
 
 /** Puts the demonstration into an empty database, once; answers whether it did. Everything goes through services and so obeys every rule. */
-export function seedDemonstration(app: App, { database }: Platform, password: string): Promise<boolean> {
-  return database.transaction(async () => {
+export function seedDemonstration(app: App, platform: Platform, password: string): Promise<boolean> {
+  return platform.database.transaction(async () => {
     if (await app.accounts.isAnyFounded()) return false;
     const owner = await foundWorkshop(app, password);
     await seedShop(app, owner);
     for (const job of demonstrationJobs()) await seedJob(app, owner, job);
+    await seedInvoices(app, platform, owner);
     return true;
   });
 }

@@ -50,15 +50,25 @@ export const readJournal = endpoint({
   answers: sameForPriced(journalSchema),
 });
 
-export const readJournalFile = endpoint({
-  name: 'readJournalFile',
-  summary: 'The same for the accountant, as a workbook or as comma-separated values',
+export const readJournalList = endpoint({
+  name: 'readJournalList',
+  summary: 'The same for the accountant, as comma-separated values',
   method: 'get',
-  path: '/api/journal/:form',
+  path: '/api/journal.csv',
   callers: ['owner', 'office'],
-  params: z.strictObject({ form: z.enum(['journal.csv', 'journal.xlsx']) }),
   query: periodQuery,
-  media: 'application/octet-stream',
+  media: 'text/csv',
+  answers: sameForPriced(z.unknown()),
+});
+
+export const readJournalWorkbook = endpoint({
+  name: 'readJournalWorkbook',
+  summary: 'The same for the accountant, as a workbook with its sums as formulas',
+  method: 'get',
+  path: '/api/journal.xlsx',
+  callers: ['owner', 'office'],
+  query: periodQuery,
+  media: 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet',
   answers: sameForPriced(z.unknown()),
 });
 

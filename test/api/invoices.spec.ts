@@ -280,6 +280,7 @@ describe('numbers', () => {
   const inTransaction = <T>(work: () => Promise<T>) => api.platform.database.transaction(work);
 
   it('have neither gap nor double: fifty issued at once, a tenth of them undone', async () => {
+    await sayWho(api.ours);
     const drafts = await Promise.all(Array.from({ length: 50 }, () => sampleDraft(api.ours)));
     const before = await api.platform.database.select<{ count: number }>(
       "SELECT COUNT(*) AS count FROM invoices WHERE kind = 'invoice' AND state = 'issued' AND workshop_id = :id",

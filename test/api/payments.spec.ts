@@ -4,7 +4,8 @@ import { v7 as newId } from 'uuid';
 import type { Journal, Payment, Statement } from '#shared/invoices/payment-schema';
 import {
   readJournal,
-  readJournalFile,
+  readJournalList,
+  readJournalWorkbook,
   readOwed,
   readStatement,
   readStatementPaper,
@@ -195,13 +196,13 @@ describe('what is owed', () => {
     const clientId = await enterClient(api.as('owner'), clientNamed(clientName));
     const sample = await sampleInvoice(api.ours, { clientId });
     await pay({ ...(await entryFor(sample, 100)), reference: '@SUM(A1)' });
-    const file = (form: string) =>
+    const file = (endpoint: typeof readJournalList | typeof readJournalWorkbook) =>
       api
         .as('office')
-        .call(readJournalFile, { params: { form }, query: wide })
+        .call(endpoint, { query: wide })
         .buffer(true)
         .parse(binary as never);
-    const csv = ((await file('journal.csv')).body as Buffer).toString('utf8');
+    const csv = ((await file(readJournalList)).body as Buffer).toString('utf8');
     const rows = csv
       .replace(/^\ufeff/, '')
       .trim()
@@ -214,7 +215,7 @@ describe('what is owed', () => {
       list.reduce((sum, [, amount]) => sum + Math.round(amount * 100), 0);
     expect(cents(amounts.slice(-1))).toBe(cents(entries));
     const workbook = new Workbook();
-    await workbook.xlsx.load((await file('journal.xlsx')).body as never);
+    await workbook.xlsx.load((await file(readJournalWorkbook)).body as never);
     const [sheet] = workbook.worksheets;
     const last = sheet.getRow(sheet.rowCount).getCell(8).value as { formula: string; result: number };
     expect(last.formula).toMatch(/^SUM\(/);

@@ -1,6 +1,7 @@
 import {
   readJournal,
-  readJournalFile,
+  readJournalList,
+  readJournalWorkbook,
   readOwed,
   readStatement,
   readStatementPaper,
@@ -40,7 +41,8 @@ const owedRoutes = ({ ledger, papers, letters }: Parts): Route[] => [
   mount(readStatement, ({ actor, params, query }) => ledger.statement(actor.workshopId, params.clientId, query)),
   mount(readStatementPaper, ({ actor, params, query }) => papers.statement(actor.workshopId, params.clientId, query)),
   mount(readJournal, ({ actor, query }) => ledger.journal(actor.workshopId, query)),
-  mount(readJournalFile, ({ actor, params, query }) => papers.journal(actor.workshopId, params.form, query)),
+  mount(readJournalList, ({ actor, query }) => papers.journal(actor.workshopId, 'journal.csv', query)),
+  mount(readJournalWorkbook, ({ actor, query }) => papers.journal(actor.workshopId, 'journal.xlsx', query)),
   mount(remindOfInvoice, ({ actor, params, body }) => letters.remind(actor, params.invoiceId, body.note)),
 ];
 

@@ -3,6 +3,7 @@ import type { Actor } from '#shared/actor/actor';
 import type { Contract, ContractPart } from '#shared/agreements/contract';
 import { claimRounding, contractAccount, isClaiming, type ClaimingInvoice } from '#shared/invoices/contract-account';
 import type { ContractAccountAnswer } from '#shared/invoices/contract-account-endpoints';
+import { buyerOf } from '#shared/invoices/buyer-of';
 import type { InvoiceContent } from '#shared/invoices/invoice';
 import { claimedAmounts, type StageClaim } from '#shared/invoices/stage-claim';
 import { stageLines } from '#shared/invoices/stage-lines';
@@ -14,7 +15,7 @@ import type { DraftService } from './draft-service';
 import type { InvoiceRow } from './invoice-model';
 import { wordsOf, type InvoiceParts } from './invoice-parts';
 import type { StageDayRepository } from './stage-day-repository';
-import { buyerOf, stageNames } from './stage-words';
+import { stageNames } from './stage-words';
 
 interface Parts extends InvoiceParts {
   readonly drafts: DraftService;

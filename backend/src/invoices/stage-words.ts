@@ -1,11 +1,9 @@
 import type { ContractPart } from '#shared/agreements/contract';
-import type { InvoiceBuyer } from '#shared/invoices/invoice';
 import type { StageClaim } from '#shared/invoices/stage-claim';
 import type { StageLineNames } from '#shared/invoices/stage-lines';
 import { cumulativePercents } from '#shared/money/cumulative-parts';
 import { D } from '#shared/money/decimal';
 import type { PaperWords } from '../documents';
-import type { ClientRow } from '../jobs';
 
 /** The name of the planned stage that a claim is the whole of, if there is one. */
 function plannedName(part: ContractPart, claim: StageClaim): string | undefined {
@@ -42,13 +40,3 @@ export const stageNames = (words: PaperWords, part: ContractPart, claim: StageCl
   recovered: words.say('invoice-line-recovered'),
   retained: words.say('invoice-line-retained'),
 });
-
-/** The buyer as the client's entry has it; of what country they are nobody has said, so it is the workshop's own. */
-export function buyerOf(client: ClientRow, country: string): InvoiceBuyer {
-  const registration = client.taxRegistration.replace(/\s/g, '').toUpperCase();
-  const isVatId = /^[A-Z]{2}[0-9A-Z]{2,18}$/.test(registration);
-  return {
-    ...{ name: client.name, contact: client.contact, address: client.address, country, email: client.email },
-    ...{ vatId: isVatId ? registration : '', companyNumber: isVatId ? '' : client.taxRegistration, reference: '' },
-  };
-}
