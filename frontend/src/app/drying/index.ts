@@ -1,4 +1,5 @@
 export { DryingRibbon } from './drying-ribbon';
+export { holdNames } from './hold-names';
 export { HoldTable } from './hold-table';
 export { gatheredFindings, type GatheredFinding } from './gathered-findings';
 export { JointMovement } from './joint-movement';

@@ -4,6 +4,8 @@ export const dayStyles = {
   dated: { day: 'numeric', month: 'short', year: 'numeric' },
   long: { weekday: 'long', day: 'numeric', month: 'long' },
   weekday: { weekday: 'short', day: 'numeric' },
+  full: { weekday: 'short', day: 'numeric', month: 'short' },
+  month: { month: 'short', year: 'numeric' },
 } as const satisfies Record<string, Intl.DateTimeFormatOptions>;
 
 export type DayStyle = keyof typeof dayStyles;

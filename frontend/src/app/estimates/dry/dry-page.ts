@@ -1,13 +1,15 @@
-import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
-import { Router } from '@angular/router';
+import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
+import { Router, RouterLink } from '@angular/router';
 import { BatchList } from '../../buildups';
 import { Formats } from '../../core/formats/formats';
 import { DryingRibbon, HoldTable, JointMovement, LotSteps } from '../../drying';
 import { ReasonPanel } from '../../ui/figure/reason-panel';
 import { EmptyState } from '../../ui/page/empty-state';
 import { FindingList } from '../../ui/page/finding-list';
+import { LaterWidget } from '../../ui/page/later-widget';
 import { EstimateStore } from '../estimate-store';
 import { PlaceExplanation } from '../places/place-explanation';
+import { ReadyDay } from '../workspace/ready-day';
 import { AirForm } from './air-form';
 import { DryCautions } from './dry-cautions';
 import { DryLots } from './dry-lots';
@@ -26,10 +28,12 @@ import { WoodMoisture } from './wood-moisture';
     FindingList,
     HoldTable,
     JointMovement,
+    LaterWidget,
     LotMembers,
     LotSteps,
     LotTable,
     ReasonPanel,
+    RouterLink,
     WoodMoisture,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -40,11 +44,27 @@ import { WoodMoisture } from './wood-moisture';
 export class DryPage {
   private readonly formats = inject(Formats);
   private readonly router = inject(Router);
+  private readonly readyDay = inject(ReadyDay);
   private readonly asked = signal<string | undefined>(undefined);
   protected readonly store = inject(EstimateStore);
   protected readonly lots = inject(DryLots);
   protected readonly cautions = inject(DryCautions);
 
+  /** Which part is open, from the address. */
+  readonly part = input<string>();
+
+  protected readonly isProgramme = computed(() => this.part() === 'programme' && this.store.seesPrices());
+  /** What the programme needs to know of the estimate. */
+  protected readonly programme = computed(() => ({
+    estimateId: this.store.head()?.id,
+    version: this.store.head()?.version,
+    sentLetter: this.store.issues().find(({ state }) => state === 'sent')?.letter,
+    whatIfLots: this.lots.all().map(({ lotId, name }) => ({ lotId, name })),
+    buildUps: this.store.card()?.buildUps.buildUps.map(({ id, name }) => ({ id, name })) ?? [],
+    shopAir: this.store.settings()?.shop,
+    tellsDay: this.tellsDay,
+  }));
+  private readonly tellsDay = (day: string | undefined): void => this.readyDay.tell(day);
   protected readonly dry = computed(() => this.store.figures()?.dry);
   protected readonly heading = computed(() => {
     const dry = this.dry();

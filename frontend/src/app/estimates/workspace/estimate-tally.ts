@@ -7,6 +7,7 @@ import { Formats } from '../../core/formats/formats';
 import type { TallyCell } from '../../ui/page/tally-cell';
 import { EstimateStore } from '../estimate-store';
 import { MemberSelection } from '../members/member-selection';
+import { ReadyDay } from './ready-day';
 
 type Place = 'measure' | 'carve' | 'gild' | 'dry' | 'price' | 'issue';
 
@@ -19,6 +20,7 @@ export class EstimateTally {
   private readonly store = inject(EstimateStore);
   private readonly selection = inject(MemberSelection);
   private readonly formats = inject(Formats);
+  private readonly ready = inject(ReadyDay);
   private readonly router = inject(Router);
   private readonly address = toSignal(
     this.router.events.pipe(
@@ -62,7 +64,7 @@ export class EstimateTally {
       {
         name: $localize`Dry`,
         figure: $localize`${this.formats.number(tally.weeks, 1)}:weeks: weeks`,
-        minor: $localize`${this.formats.number(tally.workingDays, 0)}:days: working days`,
+        minor: this.readyBy() ?? $localize`${this.formats.number(tally.workingDays, 0)}:days: working days`,
         route: this.route('dry'),
       },
     ];
@@ -107,6 +109,12 @@ export class EstimateTally {
     const sign = difference_minor < 0 ? '− ' : '+ ';
     if (difference_minor === 0) return $localize`unchanged`;
     return `${sign}${this.formats.wholeMoney(Math.abs(difference_minor))}`;
+  }
+
+  /** Once a programme is kept it says more than a count of days. */
+  private readyBy(): string | undefined {
+    const day = this.ready.day();
+    return day && $localize`by ${this.formats.day(day, 'short')}:day:`;
   }
 
   private spread({ low, high }: Triple): string {

@@ -6,6 +6,7 @@ import { EstimateStore } from '../estimate-store';
 import { LiveFigures } from '../figures/live-figures';
 import { MemberActions } from '../members/member-actions';
 import { MemberSelection } from '../members/member-selection';
+import { ReadyDay } from './ready-day';
 
 /** What lives as long as one estimate is open. Pages inject `EstimateStore`, `MemberSelection` and `MemberActions`. */
 export const workspaceProviders: Provider[] = [
@@ -16,4 +17,5 @@ export const workspaceProviders: Provider[] = [
   EstimateStore,
   MemberSelection,
   MemberActions,
+  ReadyDay,
 ];

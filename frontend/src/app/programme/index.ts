@@ -1,0 +1,1 @@
+export { EstimateProgramme } from './plan/estimate-programme';

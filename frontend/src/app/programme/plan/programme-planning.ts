@@ -1,0 +1,134 @@
+import { DestroyRef, Injectable, computed, inject, signal } from '@angular/core';
+import type { SolutionAnswer } from '#shared/programme/solution-schema';
+import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
+import type { Programme } from '#shared/programme/programme-plan';
+import type { Remedy } from '#shared/programme/programme-remedies';
+import type { Finding } from '#shared/words/finding';
+import { Notices } from '../../core/problems/notices';
+import { ProblemError } from '../../core/problems/problem-error';
+import { pinnedRequest } from './pinned-request';
+import { Planner, PlanningStopped } from './planner';
+import { ProgrammeClient } from './programme-client';
+import { ProgrammeStore } from './programme-store';
+
+const seconds = 20;
+const replanSeconds = 4;
+const serverSeconds = 30;
+const pollEvery_ms = 1000;
+
+/** Planning as a person asks for it: in the browser or on the server, anew or round a pinned task; what comes of it is a proposal or says why not. */
+@Injectable()
+export class ProgrammePlanning {
+  private readonly planner = inject(Planner);
+  private readonly store = inject(ProgrammeStore);
+  private readonly client = inject(ProgrammeClient);
+  private readonly notices = inject(Notices);
+  private readonly ended = new AbortController();
+  private readonly failed = signal<Programme | undefined>(undefined);
+  private readonly ways = signal<readonly Remedy[] | undefined>(undefined);
+  private readonly running = signal<SolutionAnswer | undefined>(undefined);
+
+  readonly isWorking = computed(() => this.planner.isWorking() || this.running() !== undefined);
+  readonly isOnServer = computed(() => this.running() !== undefined);
+  /** When all is done by the best plan so far; undefined while there is none. */
+  readonly bestFinish_minutes = computed(
+    () => (this.running()?.finish_minutes ?? this.planner.best()?.finish_minutes) || undefined,
+  );
+  /** Why there is no plan. */
+  readonly findings = computed<readonly Finding[]>(() => this.failed()?.findings ?? []);
+  /** What would help; undefined until it was asked. */
+  readonly remedies = this.ways.asReadonly();
+
+  constructor() {
+    inject(DestroyRef).onDestroy(() => this.ended.abort());
+  }
+
+  /** Plans all of it in the browser. */
+  async plan(movesLittle: boolean): Promise<void> {
+    const answer = this.store.answer();
+    if (!answer) return;
+    const question = { request: answer.request, search: this.store.search(movesLittle), seconds };
+    const plan = await this.worked(() => this.planner.plan(question));
+    if (plan) this.take(plan, null);
+  }
+
+  /** Plans round a task put elsewhere, or set free; nothing else moves that need not. True where it can be. */
+  async place(taskId: string, start_minutes: number | null): Promise<boolean> {
+    const [answer, plan, inputs] = [this.store.answer(), this.store.plan(), this.store.withPin(taskId, start_minutes)];
+    if (!answer || !plan || !inputs) return false;
+    const request = pinnedRequest(answer.request, { taskId, start_minutes });
+    const question = { request, search: { previous: plan }, seconds: replanSeconds };
+    const found = await this.worked(() => this.planner.plan(question));
+    return found ? this.take(found, inputs) : false;
+  }
+
+  /** Tries what would help the task that finds no time. */
+  async help(): Promise<void> {
+    const [request, about] = [this.store.answer()?.request, this.findings().find(({ about }) => about)?.about];
+    if (request && about) this.ways.set(await this.planner.remedies(request, about));
+  }
+
+  async planOnServer(): Promise<void> {
+    const estimateId = this.store.answer()?.estimateId;
+    if (!estimateId) return;
+    this.clear();
+    await this.told(async () => {
+      let solution = await this.client.solve(estimateId, { seconds: serverSeconds, keepsPlan: false });
+      while (solution.state === 'waiting' || solution.state === 'working') {
+        this.running.set(solution);
+        await new Promise((resolve) => setTimeout(resolve, pollEvery_ms));
+        solution = await this.client.solution(solution.id, this.ended.signal);
+      }
+      this.end(solution);
+    });
+    this.running.set(undefined);
+  }
+
+  async stop(): Promise<void> {
+    const solution = this.running();
+    if (solution) await this.told(() => this.client.stop(solution.id));
+    else this.planner.stop();
+  }
+
+  clear(): void {
+    this.failed.set(undefined);
+    this.ways.set(undefined);
+  }
+
+  private end({ state, plan }: SolutionAnswer): void {
+    if (state === 'outdated') this.notices.complain($localize`The programme was changed meanwhile; plan it again.`);
+    if (state === 'failed') this.notices.complain($localize`The server could not plan it. Plan it here instead.`);
+    if (plan && plan.finish_minutes === null) this.failed.set(plan);
+    this.store.reload();
+  }
+
+  /** Whether there is a plan; where there is none, it stays to be told why. */
+  private take(plan: Programme, inputs: ProgrammeInputs | null): boolean {
+    if (plan.finish_minutes === null) {
+      this.failed.set(plan);
+      return false;
+    }
+    this.store.propose({ plan, inputs });
+    return true;
+  }
+
+  private async worked(work: () => Promise<Programme>): Promise<Programme | undefined> {
+    this.clear();
+    try {
+      return await work();
+    } catch (error) {
+      if (!(error instanceof PlanningStopped)) throw error;
+      return undefined;
+    }
+  }
+
+  private async told(work: () => Promise<unknown>): Promise<void> {
+    try {
+      await work();
+    } catch (error) {
+      if (this.ended.signal.aborted) return;
+      if (!(error instanceof ProblemError)) throw error;
+      this.notices.complain([error.message, ...error.problem.errors.map(({ message }) => message)].join(' '));
+    }
+  }
+}

@@ -1,0 +1,1 @@
+export const startPlanningWorker = (): Worker => new Worker(new URL('./planning-worker', import.meta.url));

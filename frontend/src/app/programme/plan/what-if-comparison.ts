@@ -1,0 +1,93 @@
+import { Injectable, inject, signal } from '@angular/core';
+import { addDays } from '#shared/calendar/add-days';
+import { costOfFurtherHands } from '#shared/programme/cost-of-further-hands';
+import { instantOf, minutesOfDay, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
+import type { Programme } from '#shared/programme/programme-plan';
+import type { WhatIf } from '#shared/programme/what-if';
+import type { WhatIfAnswer } from '#shared/programme/what-if-schema';
+import type { Finding } from '#shared/words/finding';
+import { Planner, PlanningStopped } from './planner';
+import { ProgrammeClient } from './programme-client';
+
+/** One way of doing it, by its name, against the programme as it stands. */
+export interface AskedWay {
+  readonly name: string;
+  readonly whatIf: WhatIf;
+}
+
+/** What came of planning a way: when it is ready (null: no plan, and why), and what it costs the workshop. */
+export interface ComparedWay {
+  readonly name: string;
+  readonly readyAt: string | null;
+  readonly cost_minor: number;
+  readonly costDifference_minor: number;
+  readonly findings: readonly Finding[];
+}
+
+export const asItIs: WhatIf = { day: null, climate: null, furtherGradeIds: [], lots: [] };
+
+/** Long enough for a plan that can be compared. */
+const seconds = 6;
+
+const frameOf = ({ firstDay, startsAt, timeZone }: WhatIfAnswer): ProgrammeFrame => ({
+  ...{ firstDay, timeZone },
+  startsAt_ms: Date.parse(startsAt),
+});
+
+function compared(name: string, answer: WhatIfAnswer, plan: Programme): ComparedWay {
+  const { request, rates, setUp_hours, digits } = answer;
+  const frame = frameOf(answer);
+  const hands_minor = costOfFurtherHands(plan, { request, frame, rates, setUp_hours, digits });
+  return {
+    name,
+    readyAt: plan.finish_minutes === null ? null : instantOf(plan.finish_minutes, frame),
+    cost_minor: answer.cost_minor + hands_minor,
+    costDifference_minor: answer.costDifference_minor + hands_minor,
+    findings: plan.findings,
+  };
+}
+
+/** Plans ways of doing it one after another, so that they stand side by side by finish and cost; nothing is kept. */
+@Injectable()
+export class WhatIfComparison {
+  private readonly client = inject(ProgrammeClient);
+  private readonly planner = inject(Planner);
+  private readonly done = signal<readonly ComparedWay[]>([]);
+  private readonly underWay = signal<string | undefined>(undefined);
+  private isStopped = false;
+
+  readonly ways = this.done.asReadonly();
+  /** The name of the way that is being planned. */
+  readonly working = this.underWay.asReadonly();
+
+  async compare(estimateId: string, inputs: ProgrammeInputs, ways: readonly AskedWay[]): Promise<void> {
+    this.done.set([]);
+    this.isStopped = false;
+    try {
+      for (const way of ways) {
+        this.underWay.set(way.name);
+        const one = await this.worked(estimateId, inputs, way);
+        if (this.isStopped) return;
+        this.done.update((before) => [...before, one]);
+      }
+    } catch (error) {
+      if (!(error instanceof PlanningStopped)) throw error;
+    } finally {
+      this.underWay.set(undefined);
+    }
+  }
+
+  stop(): void {
+    this.isStopped = true;
+    this.planner.stop();
+  }
+
+  private async worked(estimateId: string, { direction, day }: ProgrammeInputs, way: AskedWay): Promise<ComparedWay> {
+    const answer = await this.client.whatIf(estimateId, way.whatIf);
+    const until = minutesOfDay(addDays(way.whatIf.day ?? day, 1), frameOf(answer));
+    const search = direction === 'backward' ? { backwardFrom_minutes: until } : {};
+    const plan = await this.planner.plan({ request: answer.request, search, seconds });
+    return compared(way.name, answer, plan);
+  }
+}

@@ -1,0 +1,69 @@
+import { computed, signal, type Signal } from '@angular/core';
+import type { DrawnPart } from './ribbon-layout';
+import { pixelOf, scrolledAfterZoom, widthOf, withinZoom, type RibbonScale } from './ribbon-scale';
+
+/** What is seen of the sheet, in pixels. */
+interface Seen {
+  readonly left: number;
+  readonly top: number;
+  readonly width: number;
+  readonly height: number;
+}
+
+/** So much is drawn beyond what is seen, so that scrolling a little draws nothing anew. */
+const tile_px = 512;
+
+const tiled = (from: number, length: number): readonly [number, number] => [
+  (Math.floor(from / tile_px) - 1) * tile_px,
+  (Math.ceil((from + length) / tile_px) + 1) * tile_px,
+];
+
+const isSamePart = (one: DrawnPart, other: DrawnPart): boolean =>
+  one.left === other.left && one.right === other.right && one.top === other.top && one.bottom === other.bottom;
+
+/** What of a ribbon is in view and how large; where it has to be scrolled to after a zoom is asked of `scrollTo`. */
+export class RibbonView {
+  private readonly seenPart = signal<Seen>({ left: 0, top: 0, width: 900, height: 600 });
+  private readonly hour = signal(9);
+
+  readonly seen = this.seenPart.asReadonly();
+  readonly hour_px = this.hour.asReadonly();
+  readonly scale: Signal<RibbonScale>;
+  readonly width: Signal<number>;
+  /** In steps of tiles: scrolling within one changes nothing. */
+  readonly part = computed<DrawnPart>(
+    () => {
+      const { left, top, width, height } = this.seenPart();
+      const [[from, to], [above, below]] = [tiled(left, width), tiled(top, height)];
+      return { left: from, right: to, top: above, bottom: below };
+    },
+    { equal: isSamePart },
+  );
+
+  constructor(range: Signal<{ readonly first_minutes: number; readonly last_minutes: number }>) {
+    const width_px = computed(() => this.seenPart().width);
+    this.scale = computed(() => {
+      const { first_minutes, last_minutes } = range();
+      const filling = first_minutes + (width_px() * 60) / this.hour();
+      return { first_minutes, last_minutes: Math.max(last_minutes, filling), hour_px: this.hour() };
+    });
+    this.width = computed(() => widthOf(this.scale()));
+  }
+
+  look(seen: Partial<Seen>): void {
+    this.seenPart.update((before) => ({ ...before, ...seen }));
+  }
+
+  /** Another size; the answer is where the left edge has to stand for the place at a pixel of the screen to stay there. */
+  zoom(hour_px: number, at_px = this.seenPart().width / 2): number {
+    const next = withinZoom(hour_px);
+    const left = scrolledAfterZoom({ scroll_px: this.seenPart().left, at_px }, this.scale(), next);
+    this.hour.set(next);
+    return left;
+  }
+
+  /** Where the left edge has to stand for a moment to be seen in full, with what comes after it. */
+  leftFor(minutes: number): number {
+    return Math.max(0, pixelOf(minutes, this.scale()) - this.seenPart().width / 6);
+  }
+}
