@@ -73,6 +73,7 @@ export function openApp(platform: Platform, catcher?: MailCatcher): App {
     isPage,
     catcher,
   });
-  const sweep = async () => void (await Promise.all([web.sweep(), accounts.sweep(), platform.files.sweep()]));
+  const sweep = async () =>
+    void (await Promise.all([web.sweep(), accounts.sweep(), agreements.signIns.sweep(), platform.files.sweep()]));
   return { ...features, web, sweep };
 }

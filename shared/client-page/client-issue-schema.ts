@@ -64,6 +64,8 @@ export const clientDecisionSchema = z.strictObject({
   pdfSha256: z.string(),
 });
 
+export type ClientDecision = z.infer<typeof clientDecisionSchema>;
+
 /** A whole issue as its client reads it; not a word of cost, margin, hours or rates. */
 export const clientIssueSchema = z.strictObject({
   letterhead: clientLetterheadSchema,
@@ -87,6 +89,10 @@ export const clientIssueSchema = z.strictObject({
   /** Whether alternatives can be chosen here; an issue that was worked by an earlier reckoning is accepted as it stands. */
   mayChoose: z.boolean(),
   isDrying: z.boolean(),
+  /** The dates of the base as they were planned when it was issued; null where nothing was planned. */
+  programme: z
+    .strictObject({ startsOn: z.string(), finishesOn: z.string(), offeredOn: z.string(), workingDays: z.int() })
+    .nullable(),
   cautions: z.array(findingSchema),
   care: z.array(z.string()),
   questions: z.array(questionSchema),

@@ -26,6 +26,11 @@ export class ClientAccessRepository extends WorkshopRows<ClientAccessRow> {
     return (await this.list(workshopId, { where, limit: 10 })).length;
   }
 
+  /** Links to sign in that ended before; those to the papers of a job stay, since the workshop is shown them. */
+  sweepSignIns(before: Date): Promise<number> {
+    return this.table.destroy({ where: { purpose: 'sign-in', endsAt: { [Op.lt]: before } } });
+  }
+
   /** Whose secret this is, in whatever workshop; the secret alone says so, before anybody is known. */
   async byTokenHash(tokenHash: string): Promise<ClientAccessRow | undefined> {
     const row = await this.table.findOne({ where: { tokenHash }, raw: true });

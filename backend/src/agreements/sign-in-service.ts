@@ -18,6 +18,7 @@ interface Parts {
 
 const requestKind = 'client-sign-in-request';
 const life_minutes = 60;
+const kept_days = 7;
 const most = { letters: 3, within_minutes: 15 } as const;
 const later = (now: Date, minutes: number): Date => new Date(now.getTime() + minutes * 60_000);
 
@@ -36,6 +37,11 @@ export class SignInService {
   /** Does the same for every address: whether it is known is found out later, when nobody waits for the answer. */
   async ask(email: string): Promise<void> {
     await this.parts.tasks.add({ workshopId: null, kind: requestKind, content: { email } });
+  }
+
+  /** Forgets links that ended more than a week ago. */
+  async sweep(): Promise<void> {
+    await this.parts.accesses.sweepSignIns(later(this.parts.clock.now(), -kept_days * 24 * 60));
   }
 
   private async write(email: string): Promise<void> {

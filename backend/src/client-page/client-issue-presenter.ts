@@ -78,6 +78,13 @@ function textsOf({ snapshot }: ClientIssueRows) {
   return { introduction, included, excluded, terms, presentation, note, issuedBy, addressee: { ...client } };
 }
 
+/** Its dates; what they assume of benches, hands and hours stays with the workshop. */
+function programmeOf({ programme }: Snapshot): ClientIssue['programme'] {
+  if (!programme) return null;
+  const { startsOn, finishesOn, offeredOn, workingDays } = programme;
+  return { startsOn, finishesOn, offeredOn, workingDays };
+}
+
 function workOf({ issue: { snapshot }, alternatives, mayChoose }: ClientIssueFacts) {
   const { figures, draft, leafValidUntil } = snapshot;
   return {
@@ -89,6 +96,7 @@ function workOf({ issue: { snapshot }, alternatives, mayChoose }: ClientIssueFac
       presentClientAlternative(snapshot, one, alternatives.get(one.id)),
     ),
     mayChoose,
+    programme: programmeOf(snapshot),
     isDrying: figures.dry.lots.some((lot) => lot.drying_minutes > 0),
     cautions: clientCautions({ findings: figures.findings, isRestoration: draft.settings.restoration }),
     care: careOf(snapshot),

@@ -21,6 +21,9 @@ interface Parts {
   readonly invoices: ClientInvoices;
 }
 
+const isSameChoice = (one: Choice, other: Choice): boolean =>
+  one.length === other.length && one.every((id) => other.includes(id));
+
 /** What a client reads: all that is theirs, one issue, its papers. */
 export class ClientPageService {
   constructor(private readonly parts: Parts) {}
@@ -63,7 +66,8 @@ export class ClientPageService {
     const { scope, decisions, papers, choices } = this.parts.agreements;
     const issue = await scope.issue(client, issueId);
     const decision = await decisions.onIssue(client.workshopId, issueId);
-    if (decision?.kind === 'accepted' && choice.length === 0) return papers.of(decision);
+    if (decision?.kind === 'accepted' && (choice.length === 0 || isSameChoice(choice, decision.choice)))
+      return papers.of(decision);
     const { paper } = await choices.reviewed(issue, choice);
     return new FileAnswer(paper.bytes, { name: paper.name, media: paper.media });
   }

@@ -16,6 +16,10 @@ import { ClientIssueStore } from './client-issue-store';
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <h1 tabindex="-1" i18n>Decline this estimate</h1>
+    <p i18n>
+      The workshop is told, and this issue is closed. If something about it could be done otherwise, you might ask a
+      question first.
+    </p>
     <form class="fields single" [formGroup]="form.group" (ngSubmit)="decline()">
       <app-field
         i18n-label
@@ -54,7 +58,9 @@ export class ClientDecline {
   protected async decline(): Promise<void> {
     const issueId = this.store.issue()?.issue.id;
     if (issueId === undefined) return;
-    const wasDeclined = await this.form.send((body) => this.api.call(declineIssue, { params: { issueId }, body }));
+    const wasDeclined = await this.form.send(async (body) =>
+      this.store.decided(await this.api.call(declineIssue, { params: { issueId }, body })),
+    );
     if (wasDeclined) this.declined.emit();
   }
 }

@@ -82,9 +82,14 @@ import { addressOf } from '../core/api/address-of';
       font-size: 1.125rem;
     }
 
+    footer p {
+      margin: 0;
+    }
+
     footer a {
       display: inline-block;
-      padding: 4px 0;
+      min-height: var(--target);
+      padding: 10px 0;
     }
   `,
 })

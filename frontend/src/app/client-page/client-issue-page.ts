@@ -19,7 +19,6 @@ import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
 import { PageTitle } from '../core/routing/page-title';
 import { Session } from '../core/session/session';
-import { EmptyState } from '../ui/page/empty-state';
 import { FindingList } from '../ui/page/finding-list';
 import { Skeleton } from '../ui/page/skeleton';
 import { ClientChoices } from './client-choices';
@@ -29,6 +28,7 @@ import { ClientIssueStore } from './client-issue-store';
 import { ClientLines } from './client-lines';
 import { ClientPayments } from './client-payments';
 import { ClientPieces } from './client-pieces';
+import { ClientRefused } from './client-refused';
 import { ClientReview } from './client-review';
 import { ClientThread } from './client-thread';
 
@@ -36,8 +36,8 @@ import { ClientThread } from './client-thread';
 @Component({
   selector: 'app-client-issue-page',
   imports: [
-    ...[ClientChoices, ClientDecline, ClientFrame, ClientLines, ClientPayments, ClientPieces, ClientReview],
-    ...[ClientThread, EmptyState, FindingList, MatButton, NgTemplateOutlet, RouterLink, Skeleton],
+    ...[ClientChoices, ClientDecline, ClientFrame, ClientLines, ClientPayments, ClientPieces, ClientRefused],
+    ...[ClientReview, ClientThread, FindingList, MatButton, NgTemplateOutlet, RouterLink, Skeleton],
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   providers: [ClientIssueStore],
@@ -67,6 +67,21 @@ export class ClientIssuePage {
     (this.store.issue()?.care ?? []).map((code) => this.words.say(code as 'care-handling')),
   );
 
+  /** The dates of the programme, which was planned for the base alone. */
+  protected readonly dates = computed(() => {
+    const programme = this.store.issue()?.programme;
+    if (!programme || this.store.choice().length > 0) return '';
+    const [starts, finishes, offered] = [programme.startsOn, programme.finishesOn, programme.offeredOn].map((day) =>
+      this.formats.day(day),
+    );
+    return this.words.say('paper-programme-dates', { starts, finishes, offered, days: programme.workingDays });
+  });
+  protected readonly underSum = computed(() => {
+    const programme = this.store.issue()?.programme;
+    if (!programme || this.dates() === '') return $localize`tax included`;
+    return $localize`tax included, ready by ${this.formats.day(programme.offeredOn, 'short')}:day:`;
+  });
+
   constructor() {
     effect(() => this.store.open(this.issueId()));
     effect(() => this.session.visit(this.store.issue()?.letterhead));
@@ -81,13 +96,14 @@ export class ClientIssuePage {
     afterNextRender(() => this.toTheTop(), { injector: this.injector });
   }
 
-  protected decided(): void {
+  /** Back from the last look; meanwhile something may have been changed at the workshop. */
+  protected back(): void {
     this.store.reload();
     this.go('reading');
   }
 
   private toTheTop(): void {
     globalThis.scrollTo?.(0, 0);
-    this.host.nativeElement.querySelector<HTMLElement>('h1')?.focus();
+    this.host.nativeElement.querySelector<HTMLElement>(this.store.mayAnswer() ? 'h1' : '.answer')?.focus();
   }
 }

@@ -1,6 +1,6 @@
 import { Injectable, computed, inject, linkedSignal, resource, signal } from '@angular/core';
 import { priceClientChoice, readClientIssue } from '#shared/client-page/client-issues-endpoints';
-import type { ClientIssue } from '#shared/client-page/client-issue-schema';
+import type { ClientDecision, ClientIssue } from '#shared/client-page/client-issue-schema';
 import type { Question } from '#shared/agreements/question-schema';
 import { Api } from '../core/api/api';
 
@@ -19,10 +19,13 @@ export class ClientIssueStore {
   readonly problem = computed(() => this.reading.error()?.message ?? '');
   readonly mayAnswer = computed(() => this.issue()?.issue.state === 'open');
 
-  /** What was decided, or else the base until the client chooses. */
-  private readonly chosen = linkedSignal({
+  /** What was decided, or else the base until the client chooses; a question asked meanwhile leaves the choice alone. */
+  private readonly chosen = linkedSignal<ClientIssue | undefined, readonly string[]>({
     source: this.issue,
-    computation: (issue): readonly string[] => issue?.decision?.choice ?? [],
+    computation: (issue, before): readonly string[] => {
+      if (issue?.decision) return issue.decision.choice;
+      return issue && before?.source?.issue.id === issue.issue.id ? before.value : [];
+    },
   });
   readonly choice = this.chosen.asReadonly();
 
@@ -58,6 +61,11 @@ export class ClientIssueStore {
   /** Puts a question into the thread, as the server kept it. */
   asked(question: Question): void {
     this.reading.update((issue) => issue && { ...issue, questions: [...issue.questions, question] });
+  }
+
+  /** Shows what was decided at once, so that nothing can be answered twice. */
+  decided(decision: ClientDecision): void {
+    this.reading.update((issue) => issue && { ...issue, decision, issue: { ...issue.issue, state: decision.kind } });
   }
 
   private known(): ClientIssue['price'] | undefined {

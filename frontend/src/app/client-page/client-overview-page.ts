@@ -4,15 +4,15 @@ import { readClientOverview } from '#shared/client-page/client-issues-endpoints'
 import { Api } from '../core/api/api';
 import { Formats } from '../core/formats/formats';
 import { Session } from '../core/session/session';
-import { EmptyState } from '../ui/page/empty-state';
 import { Skeleton } from '../ui/page/skeleton';
 import { ClientFrame } from './client-frame';
+import { ClientRefused } from './client-refused';
 import { clientStateNames } from './client-state-names';
 
 /** All of a client's papers: estimates job by job with where they stand, and invoices with what is open. */
 @Component({
   selector: 'app-client-overview-page',
-  imports: [ClientFrame, EmptyState, RouterLink, Skeleton],
+  imports: [ClientFrame, ClientRefused, RouterLink, Skeleton],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './client-overview-page.html',
   styleUrl: './client-overview-page.scss',

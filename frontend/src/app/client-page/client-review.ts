@@ -48,6 +48,7 @@ export class ClientReview {
     const offered: ClientIssue['alternatives'] = this.store.issue()?.alternatives ?? [];
     return offered.filter(({ id }) => this.store.choice().includes(id));
   });
+  protected readonly firstPayment = computed(() => this.review()?.price.payments[0]?.paid_minor);
   protected readonly paper = computed(() => {
     const chosen = this.issueChosen();
     return chosen
@@ -59,16 +60,12 @@ export class ClientReview {
     const chosen = this.issueChosen();
     const review = this.review();
     if (!chosen || !review) return;
-    const wasAccepted = await this.form.send(({ typedName }) =>
-      this.api.call(acceptIssue, {
-        params: { issueId: chosen.issueId },
-        body: {
-          ...{ typedName, agrees: true, choice: chosen.choice },
-          ...{ gross_minor: review.price.gross_minor, pdfSha256: review.pdfSha256 },
-        },
-        idempotencyKey: this.key,
-      }),
-    );
+    const params = { issueId: chosen.issueId };
+    const seen = { gross_minor: review.price.gross_minor, pdfSha256: review.pdfSha256 };
+    const wasAccepted = await this.form.send(async ({ typedName }) => {
+      const body = { typedName, agrees: true, choice: chosen.choice, ...seen } as const;
+      this.store.decided(await this.api.call(acceptIssue, { params, body, idempotencyKey: this.key }));
+    });
     if (wasAccepted) this.accepted.emit();
   }
 

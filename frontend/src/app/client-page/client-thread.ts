@@ -25,7 +25,7 @@ import { ClientIssueStore } from './client-issue-store';
           </li>
         }
       </ol>
-      <form class="fields single" [formGroup]="form.group" (ngSubmit)="send(issue.issue.id)">
+      <form class="fields single no-print" [formGroup]="form.group" (ngSubmit)="send(issue.issue.id)">
         <app-field
           i18n-label
           label="Your question"
