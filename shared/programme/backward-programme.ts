@@ -1,5 +1,5 @@
-import { serialResult } from '#shared/programme/block-order';
-import { described, noPlan } from '#shared/programme/described-programme';
+import { serialResult } from '#shared/programme/serial-result';
+import { describedProgramme, noPlan } from '#shared/programme/described-programme';
 import { earliestTimes } from '#shared/programme/earliest-times';
 import { improvedPlan, networkPlan, type NetworkPlan } from '#shared/programme/improved-plan';
 import { mirroredNetwork } from '#shared/programme/mirrored-network';
@@ -33,7 +33,7 @@ interface LatePlan {
 
 /** A late plan as it is told: its gap is how much earlier it begins than any could, in parts of the time from then to its end. */
 function lateProgramme(ready: RequestNetwork, { plan, plans, latestStart }: LatePlan, bound: number): Programme {
-  const told = described(ready, plan, { bound, plans });
+  const told = describedProgramme(ready, plan, { bound, plans });
   const early = Math.max(0, latestStart - told.start_minutes);
   const whole = plan.finish - latestStart;
   return { ...told, status: early === 0 ? 'optimal' : 'feasible', gap: early === 0 || whole <= 0 ? 0 : early / whole };
@@ -86,7 +86,7 @@ export function backwardProgramme(ready: RequestNetwork, first: NetworkPlan, sea
     onBetter: () => undefined,
   };
   const { plan, plans } = improvedPlan({ network: ready.network, blocks: ready.blocks }, improving);
-  if (plan.finish <= finish) return described(ready, plan, { bound, plans });
+  if (plan.finish <= finish) return describedProgramme(ready, plan, { bound, plans });
   const values = { late_minutes: plan.finish - finish };
   const status = bound > finish ? 'infeasible' : 'unproven';
   return {

@@ -78,7 +78,7 @@ function brokenPlaces({ places, placeHolds }: ProgrammeRequest, { tasks }: Progr
  * What a plan breaks of a request, worked out minute by minute from the definitions and nothing of the planning, in words for a test; lags by the clock alone,
  * days of 24 hours. Empty where every rule is kept.
  */
-export function brokenRules(request: ProgrammeRequest, plan: Programme): string[] {
+export function brokenRulesForSpecs(request: ProgrammeRequest, plan: Programme): string[] {
   const alone = request.tasks.flatMap((task) => {
     const planned = plan.tasks.find(({ taskId }) => taskId === task.id);
     return planned ? brokenAlone(task, planned, request) : [`${task.id}: missing`];

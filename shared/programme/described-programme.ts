@@ -26,7 +26,7 @@ export interface PlanKnown {
 }
 
 /** A plan as it is told, with its distance to the bound in parts of the time from the first moment to the bound; minutes. */
-export function described(
+export function describedProgramme(
   { request, network }: RequestNetwork,
   { positions, finish }: NetworkPlan,
   { bound, plans }: PlanKnown,

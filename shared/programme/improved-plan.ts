@@ -1,5 +1,5 @@
 import { seededGenerator, type Generator32 } from '#shared/estimates/risk/seeded-generator';
-import { serialResult, type BlockedNetwork, type PlanHints } from '#shared/programme/block-order';
+import { serialResult, type BlockedNetwork, type PlanHints } from '#shared/programme/serial-result';
 import { mirroredNetwork } from '#shared/programme/mirrored-network';
 import type { SearchLimit } from '#shared/programme/project';
 import { taskBlocks } from '#shared/programme/task-blocks';

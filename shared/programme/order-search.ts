@@ -1,7 +1,7 @@
 import { keepsTimetable, usageOf, type Usage } from '#shared/programme/keeps-timetable';
 import type { LagMatrix } from '#shared/programme/lag-matrix';
 import type { Project, ProjectStarts, SearchLimit } from '#shared/programme/project';
-import { keepsApart, pairsApart, type ApartPair } from '#shared/programme/project-orders';
+import { keepsApart, pairsApart, type ApartPair } from '#shared/programme/keeps-apart';
 import { keepsLoads, usageLoads, type UsageLoad } from '#shared/programme/usage-loads';
 import { projectStarts } from '#shared/programme/project-starts';
 import { cheapestOrder, type ConflictChoice, usageConflict } from '#shared/programme/usage-conflict';

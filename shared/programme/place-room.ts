@@ -38,7 +38,7 @@ export interface HoldState {
  * From when a place has room for a hold that begins at a moment or later and ends as `endOf` says (Infinity where that is not known): the moment
  * itself, a later one, or Infinity while somebody holds it without an end.
  */
-export function roomFrom(
+export function placeRoomFrom(
   place: NetworkPlace,
   hold: NetworkHold,
   at: HoldState & { readonly start: number; readonly endOf: (start: number) => number },

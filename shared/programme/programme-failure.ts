@@ -15,7 +15,7 @@ export function requestRefusals(request: ProgrammeRequest, network: TaskNetwork)
 }
 
 /** Why a request has no plan: which step found no time, and because of which other. */
-export function failureFinding(request: ProgrammeRequest, { ready, result }: FirstResult): Finding {
+export function programmeFailure(request: ProgrammeRequest, { ready, result }: FirstResult): Finding {
   const failure = result.failure ?? { task: 0, arc: null, isHeld: false };
   const { name, id, isBreakable } = request.tasks[failure.task];
   if (!failure.arc) {

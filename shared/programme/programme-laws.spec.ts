@@ -1,12 +1,12 @@
 import * as fc from 'fast-check';
-import { brokenRules } from '#shared/programme/broken-rules-for-specs';
+import { brokenRulesForSpecs } from '#shared/programme/broken-rules-for-specs';
 import { programme } from '#shared/programme/programme';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
-import { randomRequest } from '#shared/programme/random-request-for-specs';
+import { randomRequestForSpecs } from '#shared/programme/random-request-for-specs';
 import { personForSpecs } from '#shared/programme/request-for-specs';
 
-const requests = fc.nat({ max: 1_000_000 }).map((seed) => randomRequest(seed, 4));
+const requests = fc.nat({ max: 1_000_000 }).map((seed) => randomRequestForSpecs(seed, 4));
 const quick = { limit: { nodes: 6 } };
 
 /** Requests with a plan of each; those that have none are left out. */
@@ -23,7 +23,7 @@ const placesOf = ({ tasks }: Programme) =>
 
 describe('Every programme', () => {
   it('keeps hours, grades, crews, lags, racks: nobody is at two places at once', () => {
-    check(150, ({ request, plan }) => expect(brokenRules(request, plan)).toEqual([]));
+    check(150, ({ request, plan }) => expect(brokenRulesForSpecs(request, plan)).toEqual([]));
   });
 
   it('ends no earlier than its bound, and is best where it meets it', () => {
@@ -85,7 +85,7 @@ describe('Every programme', () => {
       const request2 = { ...request, tasks: request.tasks.map(longer) };
       const again = programme(request2, { previous: plan });
       fc.pre(again.finish_minutes !== null);
-      expect(brokenRules(request2, again)).toEqual([]);
+      expect(brokenRulesForSpecs(request2, again)).toEqual([]);
       const tied = new Set(
         request.lags.filter(({ most }) => most !== null).flatMap((lag) => [lag.fromTaskId, lag.toTaskId]),
       );
@@ -101,7 +101,7 @@ describe('Every programme', () => {
     check(40, ({ request, plan }) => {
       const wanted = finishOf(plan) + 5000;
       const late = programme(request, { ...quick, backwardFrom_minutes: wanted });
-      expect(brokenRules(request, late)).toEqual([]);
+      expect(brokenRulesForSpecs(request, late)).toEqual([]);
       expect(finishOf(late)).toBeLessThanOrEqual(wanted);
       expect(late.start_minutes).toBeGreaterThanOrEqual(request.start_minutes);
     });

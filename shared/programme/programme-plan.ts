@@ -3,6 +3,9 @@ import type { ProjectStatus } from '#shared/programme/project';
 import type { Finding } from '#shared/words/finding';
 import type { Reason } from '#shared/words/reason';
 
+/** What is known of a plan at the end: proven best, keeping every rule, proven impossible, or not found before the limit. */
+export type ProgrammePlanStatus = ProjectStatus;
+
 /**
  * One task of a plan, all in minutes from the start of the calendar's first day. `spans` are its work, several where nights or absences break it;
  * `dryUntil_minutes` is when the longest of its drying is over, `windowUntil_minutes` when the first of its windows closes. `slack_minutes` is how much
@@ -25,7 +28,7 @@ export interface PlannedTask extends MomentSpan {
  * plan backward from a day how much earlier it begins than any could.
  */
 export interface Programme {
-  readonly status: ProjectStatus;
+  readonly status: ProgrammePlanStatus;
   readonly tasks: readonly PlannedTask[];
   readonly start_minutes: number;
   readonly finish_minutes: number | null;

@@ -79,7 +79,7 @@ describe('A programme', () => {
       expect(timesOf(plan, 'size')).toEqual([at(0, 16, 30), at(0, 17)]);
       expect(timesOf(plan, 'lay')).toEqual([at(1, 8), at(1, 11)]);
       expect(taskOf(plan, 'size')).toMatchObject({ dryUntil_minutes: at(1, 5), windowUntil_minutes: at(1, 11) });
-      expect(taskOf(plan, 'size').waits.map(({ code, values }) => [code, values.task])).toEqual([
+      expect(taskOf(plan, 'size').waits.map(({ code, values }) => [code, values['task']])).toEqual([
         ['programme-waits-hours', undefined],
         ['programme-waits-window', 'lay'],
       ]);

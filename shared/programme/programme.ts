@@ -5,11 +5,11 @@ import { networkBound } from '#shared/programme/network-bound';
 import { daysUntil, networkOf } from '#shared/programme/network-of';
 import { planBreaches } from '#shared/programme/plan-breaches';
 import { programmeContradiction } from '#shared/programme/programme-contradiction';
-import { failureFinding, missedWindows, pinClashes, requestRefusals } from '#shared/programme/programme-failure';
+import { programmeFailure, missedWindows, pinClashes, requestRefusals } from '#shared/programme/programme-failure';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeRequest, ProgrammeSearch } from '#shared/programme/programme-request';
 import { projectSchedule } from '#shared/programme/project-schedule';
-import { described, noPlan } from '#shared/programme/described-programme';
+import { describedProgramme, noPlan } from '#shared/programme/described-programme';
 import { firstResult, type RequestNetwork } from '#shared/programme/request-network';
 import { replannedFrom, worth_minutes } from '#shared/programme/replanned-from';
 import { positionsOf } from '#shared/programme/standing-positions';
@@ -37,7 +37,7 @@ function exactProgramme(ready: RequestNetwork, first: NetworkPlan | null, search
   }
   const positions = starts && positionsOfStarts(network, project, { starts, from_minutes });
   const plan =
-    positions && described(ready, networkPlan(positions), { bound: from_minutes + lowerBound, plans: nodes });
+    positions && describedProgramme(ready, networkPlan(positions), { bound: from_minutes + lowerBound, plans: nodes });
   if (plan) search.onBetter?.(plan);
   return plan;
 }
@@ -57,19 +57,20 @@ function planned(ready: RequestNetwork, first: NetworkPlan, search: ProgrammeSea
   const start = better(kept, stable?.plan ?? first) ?? first;
   const bound = networkBound(ready.network, ready.earliest, start.finish);
   if (stable && start.finish <= (search.previous?.finish_minutes ?? 0) + worth_minutes)
-    return described(ready, start, { bound, plans: 1 });
-  const onBetter = (plan: NetworkPlan): void => search.onBetter?.(described(ready, plan, { bound, plans: 0 }));
+    return describedProgramme(ready, start, { bound, plans: 1 });
+  const onBetter = (plan: NetworkPlan): void => search.onBetter?.(describedProgramme(ready, plan, { bound, plans: 0 }));
   onBetter(start);
   const improving = {
     first: start,
     bound,
-    limit: search.limit ?? {},
+    limit: search.limit ?? (stable ? { nodes: triesForStable } : {}),
+    hints: stable?.hints,
     seed: search.seed ?? 1,
     lots: ready.request.tasks.map(({ lotId }) => lotId),
     onBetter,
   };
   const { plan, plans } = improvedPlan(ready, improving);
-  return described(ready, plan, { bound, plans });
+  return describedProgramme(ready, plan, { bound, plans });
 }
 
 /** What stops a request before anything is planned. */
@@ -103,7 +104,7 @@ export function programme(request: ProgrammeRequest, search: ProgrammeSearch = {
     ? exactProgramme(ready, better(first, keptPlan(ready, search.incumbent)), search)
     : null;
   if (exact) return exact;
-  if (!first) return noPlan(request, found.endless ? 'infeasible' : 'unproven', [failureFinding(request, found)]);
+  if (!first) return noPlan(request, found.endless ? 'infeasible' : 'unproven', [programmeFailure(request, found)]);
   const plan =
     search.backwardFrom_minutes === undefined ? planned(ready, first, search) : backwardProgramme(ready, first, search);
   return { ...plan, findings: [...plan.findings, ...missedWindows(request, missed)] };

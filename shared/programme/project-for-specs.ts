@@ -40,7 +40,7 @@ function lagsOf(shape: ProjectShape, activities: readonly ProjectActivity[], nex
  * A random project in the manner of the generator ProGen/max (Schwindt 1998; the way of it from memory, its figures our own): an order with cycles of most
  * lags, demands by factor and strength. The same seed gives the same project; whole units. RangeError where the seed is not whole.
  */
-export function randomProject(shape: ProjectShape, seed: number): Project {
+export function projectForSpecs(shape: ProjectShape, seed: number): Project {
   const next = seededGenerator(seed);
   const activities = Array.from({ length: shape.activities }, (): ProjectActivity => {
     const demands = Array.from({ length: shape.resources }, () => (chance(next, shape.factor) ? 1 + upTo(next, 9) : 0));

@@ -1,6 +1,6 @@
 import * as fc from 'fast-check';
 import type { Project, ProjectStarts } from '#shared/programme/project';
-import { randomProject } from '#shared/programme/project-for-specs';
+import { projectForSpecs } from '#shared/programme/project-for-specs';
 import { projectSchedule } from '#shared/programme/project-schedule';
 import { isProjectPlan } from '#shared/programme/project-starts';
 
@@ -91,7 +91,7 @@ describe('A project with least and most lags', () => {
 });
 
 const projects = fc.nat({ max: 100_000 }).map((seed) =>
-  randomProject(
+  projectForSpecs(
     {
       activities: 8,
       resources: 2,

@@ -33,7 +33,7 @@ function lot(name: string, steps: number, draw: Draw): { tasks: ProgrammeTask[];
 }
 
 /** A random job of a workshop of three, whole minutes: the same of the same seed. Some have no plan; RangeError where the seed is not whole. */
-export function randomRequest(seed: number, mostLots: number): ProgrammeRequest {
+export function randomRequestForSpecs(seed: number, mostLots: number): ProgrammeRequest {
   const next = seededGenerator(seed);
   const draw: Draw = (from, to) => from + (next() % (to - from + 1));
   const lots = Array.from({ length: draw(1, mostLots) }, (_, at) => lot(`lot${at}`, draw(2, 6), draw));

@@ -1,4 +1,4 @@
-import { serialResult, type PlanHints } from '#shared/programme/block-order';
+import { serialResult, type PlanHints } from '#shared/programme/serial-result';
 import { networkPlan, type NetworkPlan } from '#shared/programme/improved-plan';
 import type { HoldLengths } from '#shared/programme/place-room';
 import { planBreaches } from '#shared/programme/plan-breaches';

@@ -1,4 +1,4 @@
-import { serialResult, type BlockedNetwork, type SerialResult } from '#shared/programme/block-order';
+import { serialResult, type BlockedNetwork, type SerialResult } from '#shared/programme/serial-result';
 import { earliestTimes, type EarliestTimes } from '#shared/programme/earliest-times';
 import { networkPlan } from '#shared/programme/improved-plan';
 import { mirroredNetwork } from '#shared/programme/mirrored-network';

@@ -1,6 +1,6 @@
 import { Bookings } from '#shared/programme/bookings';
 import { firstPosition } from '#shared/programme/earliest-times';
-import { holdStretch, roomFrom, type HoldLengths, type HoldState } from '#shared/programme/place-room';
+import { holdStretch, placeRoomFrom, type HoldLengths, type HoldState } from '#shared/programme/place-room';
 import type { TaskBlock } from '#shared/programme/task-blocks';
 import { pointOf, type Crew, type NetworkArc, type Position, type TaskNetwork } from '#shared/programme/task-network';
 
@@ -15,6 +15,9 @@ export interface PlanFailure {
   /** Whoever comes later to a place that is held longer than was thought. */
   readonly holder?: number;
 }
+
+/** No task, where somebody would have to give way and nobody may. */
+const nobody = -1;
 
 /** Tasks of one block may be put off so often before it is given up. */
 const mostRemovals = 1000;
@@ -161,20 +164,20 @@ export class SerialPlan {
     }
   }
 
-  /** Who has to leave a place, or come to it later, since a hold that a task ends lasts longer than was thought; null where there is room. */
+  /** Who has to leave a place, or come to it later, since a hold that a task ends lasts longer than was thought: nobody, where none of them may; null where there is room. */
   private crowdedBy(task: number): number | null {
     for (const { place, hold } of this.network.closes[task]) {
       const held = hold.from === task ? null : holdStretch(hold, this.positions, this.lengths);
       if (!held || !this.lengths.has(hold)) continue;
       const endOf = (): number => held.end;
-      if (roomFrom(place, hold, { start: held.start, endOf, ...this.holds }) === held.start) continue;
+      if (placeRoomFrom(place, hold, { start: held.start, endOf, ...this.holds }) === held.start) continue;
       const later = place.holds.filter((other) => {
         const start = this.positions[other.from]?.start ?? -Infinity;
         return (
           other !== hold && start >= held.start && start < held.end && this.network.tasks[other.from].anchor === null
         );
       });
-      return later.at(-1)?.from ?? null;
+      return later.at(-1)?.from ?? nobody;
     }
     return null;
   }
@@ -185,7 +188,7 @@ export class SerialPlan {
       const ends = this.positions[hold.until]?.end;
       const length = hold.until === task ? end - start : (this.lengths.get(hold) ?? Infinity);
       const endOf = (from: number): number => ends ?? from + length;
-      free = Math.max(free, roomFrom(place, hold, { start, endOf, ...this.holds }));
+      free = Math.max(free, placeRoomFrom(place, hold, { start, endOf, ...this.holds }));
     }
     return free;
   }

@@ -1,5 +1,5 @@
-import type { ApartPair } from '#shared/programme/project-orders';
-import { mayPrecede } from '#shared/programme/project-orders';
+import type { ApartPair } from '#shared/programme/keeps-apart';
+import { mayPrecede } from '#shared/programme/keeps-apart';
 import type { LagMatrix } from '#shared/programme/lag-matrix';
 import type { Project } from '#shared/programme/project';
 

@@ -1,6 +1,6 @@
 import type { LagMatrix } from '#shared/programme/lag-matrix';
 import type { Project } from '#shared/programme/project';
-import type { ApartPair } from '#shared/programme/project-orders';
+import type { ApartPair } from '#shared/programme/keeps-apart';
 
 /** Work that has to go through a capacity: for each activity its duration × what it takes. */
 export interface UsageLoad {

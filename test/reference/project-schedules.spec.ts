@@ -2,7 +2,7 @@ import { seededGenerator } from '#shared/estimates/risk/seeded-generator';
 import { programme } from '#shared/programme/programme';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
 import type { Project } from '#shared/programme/project';
-import { randomProject } from '#shared/programme/project-for-specs';
+import { projectForSpecs } from '#shared/programme/project-for-specs';
 import { projectSchedule } from '#shared/programme/project-schedule';
 import { isProjectPlan } from '#shared/programme/project-starts';
 import {
@@ -20,7 +20,7 @@ import { exhaustiveFinish } from './exhaustive-starts';
  * the generator ProGen/max are of the same kind; these are our own in its manner, since those cannot be had here.
  */
 const small = Array.from({ length: 240 }, (_, seed) =>
-  randomProject(
+  projectForSpecs(
     {
       activities: 3 + (seed % 3),
       resources: 1 + (seed % 3),
@@ -66,7 +66,7 @@ describe('Small random networks', () => {
 });
 
 const middling = (activities: number, seed: number): Project =>
-  randomProject(
+  projectForSpecs(
     {
       activities,
       resources: 5,
