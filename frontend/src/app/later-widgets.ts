@@ -7,6 +7,9 @@ export const laterWidgets: ValueProvider = {
   useValue: {
     'job-estimates': async () => (await import('./estimates')).JobEstimates,
     'job-agreement': async () => (await import('./agreements')).JobAgreement,
+    'dry-programme': async () => (await import('./programme')).EstimateProgramme,
+    'job-invoices': async () => (await import('./invoices')).JobInvoices,
+    'client-invoices': async () => (await import('./invoices')).ClientAccount,
     'issue-sending': async () => (await import('./agreements')).IssueSending,
   },
 };
