@@ -30,6 +30,10 @@ export const presentSummary = (row: InvoiceRow, { clientName, today }: Facts): I
   credited_minor: row.creditedMinor,
 });
 
+/** What stands there now, for somebody who changed what they had read before. */
+export const presentCurrent = (row: InvoiceRow): InvoiceSummary =>
+  presentSummary(row, { clientName: row.content.buyer.name, today: '' });
+
 const papersOf = ({ pdfFileId, xmlFileId }: InvoiceRow): Invoice['papers'] => [
   ...(pdfFileId === null ? [] : (['invoice.pdf'] as const)),
   ...(xmlFileId === null ? [] : (['invoice.xml'] as const)),

@@ -14,12 +14,11 @@ import {
 import { mount, type Route } from '../platform/http/mount';
 import type { DraftService } from './draft-service';
 import type { InvoiceLetters } from './invoice-letters';
-import { presentSummary } from './invoice-presenter';
+import { presentCurrent } from './invoice-presenter';
 import type { InvoiceReading } from './invoice-reading';
 import type { InvoiceSettingsService } from './invoice-settings-service';
 import type { IssuingService } from './issuing-service';
 import type { StageService } from './stage-service';
-import type { InvoiceRow } from './invoice-model';
 
 interface Parts {
   readonly drafts: DraftService;
@@ -30,9 +29,6 @@ interface Parts {
   readonly letters: InvoiceLetters;
 }
 
-/** What stands there now, for somebody who changed what they had read before. */
-const current = (row: InvoiceRow) => presentSummary(row, { clientName: row.content.buyer.name, today: '' });
-
 export const invoiceRoutes = ({ drafts, stages, issuing, reading, settings, letters }: Parts): Route[] => [
   mount(readInvoiceSettings, ({ actor }) => settings.read(actor.workshopId)),
   mount(keepInvoiceSettings, ({ actor, version, body }) => settings.keep(actor, version, body)),
@@ -42,12 +38,12 @@ export const invoiceRoutes = ({ drafts, stages, issuing, reading, settings, lett
     keepInvoice,
     async ({ actor, params, version, body }) =>
       reading.read(await drafts.keep(actor, { id: params.invoiceId, version }, body)),
-    current,
+    presentCurrent,
   ),
   mount(
     removeInvoice,
     ({ actor, params, version }) => drafts.remove(actor, { id: params.invoiceId, version }),
-    current,
+    presentCurrent,
   ),
   mount(beginCreditNote, async ({ actor, params, body }) =>
     reading.read(await drafts.beginCreditNote(actor, params.invoiceId, body.creditNoteId)),

@@ -1,7 +1,7 @@
 import { fileName } from '../documents';
 import { FileAnswer } from '../platform/http/answer';
 import { todayIn, wordsOf, workshopOnPaper, type InvoiceParts } from './invoice-parts';
-import { journalCsv, journalWorkbook } from './journal-files';
+import { journalCsv, journalWorkbook } from './journal-workbook';
 import type { Days, LedgerService } from './ledger-service';
 import { statementPaper } from './paper/statement-paper';
 

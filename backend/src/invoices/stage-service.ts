@@ -15,7 +15,7 @@ import type { DraftService } from './draft-service';
 import type { InvoiceRow } from './invoice-model';
 import { wordsOf, type InvoiceParts } from './invoice-parts';
 import type { StageDayRepository } from './stage-day-repository';
-import { stageNames } from './stage-words';
+import { stageNames } from './stage-names';
 
 interface Parts extends InvoiceParts {
   readonly drafts: DraftService;

@@ -11,7 +11,7 @@ import {
   type Block,
   type Pdf,
 } from '../../documents';
-import { invoiceColumns, lineRows, sumRows, type InvoiceOnPaper } from './invoice-rows';
+import { invoiceColumns, lineRows, sumRows, type InvoiceOnPaper } from './invoice-on-paper';
 import type { FrozenInvoice } from '#shared/invoices/invoice';
 
 /** What a paper bears beside its words: the mark of the workshop, and the same invoice as data where it can be written as such. */

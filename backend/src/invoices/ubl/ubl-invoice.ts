@@ -1,7 +1,7 @@
 import type { FrozenInvoice } from '#shared/invoices/invoice';
-import { allowanceOf, lineOf, monetaryTotalOf, taxTotalOf } from './ubl-amounts';
-import { ublDocument, type UblPart } from './ubl-element';
-import { buyerOf, sellerOf } from './ubl-parties';
+import { allowanceOf, lineOf, monetaryTotalOf, taxTotalOf } from './monetary-total-of';
+import { ublDocument, type UblPart } from './ubl-document';
+import { buyerOf, sellerOf } from './seller-of';
 
 /** Countries of SEPA use code 58 for a transfer in euro, everything else is a plain transfer, 30 (UNTDID 4461). */
 const sepa: ReadonlySet<string> = new Set(

@@ -2,7 +2,7 @@ import { randomBytes, randomUUID } from 'node:crypto';
 import { createServer, type IncomingMessage, type Server, type ServerResponse } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import Stripe from 'stripe';
-import { paymentPage } from './stand-in-page';
+import { payOrLeave } from './pay-or-leave';
 import { fieldsOf, StandInLedger, type StandInSession } from './stand-in-ledger';
 
 /** What the stand-in needs: how its events reach the server, and what time it is. */
@@ -139,6 +139,6 @@ export class StandInPayments {
         'content-type': 'text/html; charset=utf-8',
         'content-security-policy': "default-src 'none'; style-src 'unsafe-inline'",
       })
-      .end(paymentPage(session));
+      .end(payOrLeave(session));
   }
 }

@@ -6,7 +6,7 @@ import { currencyDigits } from '#shared/money/currency-digits';
 import { D, type DecimalText, type MinorUnits } from '#shared/money/decimal';
 import type { TaxRate } from '#shared/money/tax-by-category';
 import { textOf } from '#shared/money/text-of';
-import type { UblPart, UblValue } from './ubl-element';
+import type { UblPart, UblValue } from './ubl-document';
 
 /** An amount with its currency, in the currency's own decimals (EN 16931: at most two). */
 export const amountOf = ({ currency }: Pick<FrozenInvoice, 'currency'>, amount_minor: MinorUnits): UblValue => ({

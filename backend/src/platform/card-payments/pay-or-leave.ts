@@ -12,7 +12,7 @@ const form = `<form method="post">
 </form>`;
 
 /** The page a payer is sent to; it says itself that it is none of a payment service, and asks for no card. */
-export function paymentPage({ title, amount_total, currency, status }: StandInSession): string {
+export function payOrLeave({ title, amount_total, currency, status }: StandInSession): string {
   const amount = `${amount_total} ${escaped(currency.toUpperCase())} (smallest units)`;
   const rest = status === 'open' ? form : '<p>This payment is over. You may close the page.</p>';
   return `<!doctype html><html lang="en"><head><meta charset="utf-8"><meta name="viewport" content="width=device-width"><title>Payment, standing in</title><style>${style}</style></head>

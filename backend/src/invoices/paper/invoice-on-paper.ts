@@ -80,11 +80,11 @@ function sumRow({ text, note, amount, look = 'plain' }: Sum): TableRow {
 }
 
 const exemptionWords = {
-  E: 'exemption-E',
-  AE: 'exemption-AE',
-  K: 'exemption-K',
-  G: 'exemption-G',
-  O: 'exemption-O',
+  E: 'exemption-e',
+  AE: 'exemption-ae',
+  K: 'exemption-k',
+  G: 'exemption-g',
+  O: 'exemption-o',
 } as const;
 
 /** Why a category charges nothing, in the words entered or in ours. */

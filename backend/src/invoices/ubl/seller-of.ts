@@ -1,5 +1,5 @@
 import type { FrozenInvoice } from '#shared/invoices/invoice';
-import type { UblPart } from './ubl-element';
+import type { UblPart } from './ubl-document';
 
 const linesOf = (address: string): string[] => address.split(/\r?\n/).filter((line) => line.trim() !== '');
 
