@@ -34,6 +34,11 @@ export const appRoutes: Routes = [
         loadChildren: () => import('./jobs/jobs-routes').then(({ clientsRoutes }) => clientsRoutes),
       },
       {
+        path: 'accounts',
+        canMatch: [roleGuard('owner', 'estimator', 'office')],
+        loadChildren: () => import('./invoices/invoices-routes').then(({ invoicesRoutes }) => invoicesRoutes),
+      },
+      {
         path: 'letters',
         canMatch: [roleGuard('owner', 'office')],
         loadChildren: () => import('./agreements/agreements-routes').then(({ lettersRoutes }) => lettersRoutes),
