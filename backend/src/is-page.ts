@@ -19,6 +19,7 @@ const places = new Set([
   'bench',
   'documents',
   'invoices',
+  'accounts',
   'leaf',
   'history',
   'letters',

@@ -23,6 +23,8 @@ export const units = {
   'unit-pieces': '{count, plural, one {{figure} piece} other {{figure} pieces}}',
   'number-unclear': 'Please write a plain number, with “{sign}” as the decimal sign.',
   'number-grouped': 'Please leave out thousands separators; “{sign}” is the decimal sign.',
+  'amount-too-fine':
+    '{decimals, plural, =0 {This currency has no decimals.} other {This currency has # decimals; please enter no more.}}',
   'length-unclear': 'Please write a length such as {example}.',
   'length-negative': 'A length cannot be negative.',
   'length-fraction': 'Fractions are read in inches; please add “in” or ″.',

@@ -58,7 +58,7 @@ const names = (type: 'currency' | 'region' | 'language') =>
 const isCurrent = (code: string): boolean => !noCountries.has(code) && new Intl.Locale(`und-${code}`).region === code;
 
 /** The countries the browser knows by name, by ISO 3166-1 code. */
-function countryChoices(): readonly Choice[] {
+export function countryChoices(): readonly Choice[] {
   const nameOf = names('region');
   const codes = letters.flatMap((first) => letters.map((second) => first + second)).filter(isCurrent);
   return inOrder(codes.flatMap((value) => (nameOf.of(value) ? [{ value, label: nameOf.of(value) ?? value }] : [])));

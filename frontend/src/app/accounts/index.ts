@@ -1,1 +1,2 @@
 export { AccountsSession } from './accounts-session';
+export { countryChoices } from './habit-choices';

@@ -18,6 +18,7 @@ import { Notices } from '../core/problems/notices';
 import { PageTitle } from '../core/routing/page-title';
 import { Confirm } from '../ui/dialog/confirm';
 import { EmptyState } from '../ui/page/empty-state';
+import { LaterWidget } from '../ui/page/later-widget';
 import { PageHeader } from '../ui/page/page-header';
 import { Skeleton } from '../ui/page/skeleton';
 import { ClientForm } from './client-form';
@@ -27,7 +28,7 @@ import { ClientStore } from './client-store';
 /** One client: how to reach them, their jobs, and changing or removing the entry. */
 @Component({
   selector: 'app-client-page',
-  imports: [ClientForm, EmptyState, MatButton, PageHeader, RouterLink, Skeleton],
+  imports: [ClientForm, EmptyState, LaterWidget, MatButton, PageHeader, RouterLink, Skeleton],
   changeDetection: ChangeDetectionStrategy.OnPush,
   providers: [ClientStore],
   templateUrl: './client-page.html',

@@ -52,6 +52,13 @@ export class Formats {
     return this.figure('minor', amount_minor);
   }
 
+  /** Money in the currency of a paper, which need not be the one the books are kept in today. */
+  moneyIn(currency: string, amount_minor: MinorUnits): string {
+    if (currency === this.currency()) return this.money(amount_minor);
+    const format = new Intl.NumberFormat(this.locale(), { style: 'currency', currency, numberingSystem: 'latn' });
+    return format.format(textOf(amount_minor, currencyDigits(currency)) as unknown as number);
+  }
+
   /** Money without its minor units, for a place where the whole figure stands beside it or in its explanation. */
   wholeMoney(amount_minor: MinorUnits): string {
     const options = {

@@ -1,0 +1,17 @@
+import type { StageClaim } from '#shared/invoices/stage-claim';
+import type { Formats } from '../core/formats/formats';
+
+/** What a claim on a contract is called. */
+export function claimName({ claim, name }: { claim: StageClaim; name: string }, formats: Formats): string {
+  switch (claim.of) {
+    case 'deposit':
+      return $localize`Deposit`;
+    case 'first-release':
+      return $localize`First half of what was held back`;
+    case 'second-release':
+      return $localize`Second half of what was held back`;
+    case 'work':
+      if (name) return name;
+      return $localize`Work from ${formats.number(Number(claim.from_percent))}:from: to ${formats.figure('percent', Number(claim.to_percent))}:to:`;
+  }
+}

@@ -1,0 +1,33 @@
+import type { InvoiceContent } from '#shared/invoices/invoice';
+import type { Invoice } from '#shared/invoices/invoice-schema';
+import type { Formats } from '../core/formats/formats';
+import type { Difference } from '../jobs';
+import { draftAmounts } from './draft-amounts';
+
+type Line = InvoiceContent['lines'][number];
+
+const lineText = ({ name, quantity, price }: Line, formats: Formats): string =>
+  `${name}: ${formats.number(Number(quantity), 6)} × ${formats.number(Number(price), 6)}`;
+
+/** What was entered of a draft and differs from what somebody else kept; nothing when nobody did. */
+export function draftDifferences(
+  mine: InvoiceContent | undefined,
+  theirs: Invoice | undefined,
+  formats: Formats,
+): Difference[] | undefined {
+  if (!mine || !theirs) return undefined;
+  const day = (text: string | null) => (text ? formats.day(text) : '');
+  const rows = (content: InvoiceContent): readonly (readonly [string, string])[] => [
+    [$localize`Buyer`, [content.buyer.name, content.buyer.address, content.buyer.vatId].filter(Boolean).join('\n')],
+    [$localize`Lines`, content.lines.map((line) => lineText(line, formats)).join('\n')],
+    [$localize`To be paid`, formats.moneyIn(theirs.currency, draftAmounts(content, theirs)?.totals.due_minor ?? 0)],
+    [$localize`Delivered`, day(content.deliveredOn)],
+    [$localize`Due`, day(content.dueOn)],
+    [$localize`Terms`, content.terms],
+    [$localize`Note`, content.note],
+  ];
+  const others = rows(theirs.content);
+  return rows(mine)
+    .map(([name, text], place) => ({ name, mine: text, theirs: others[place][1] }))
+    .filter((one) => one.mine !== one.theirs);
+}

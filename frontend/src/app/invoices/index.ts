@@ -1,0 +1,2 @@
+export { ClientAccount } from './client-account';
+export { JobInvoices } from './job-invoices';

@@ -1,0 +1,102 @@
+import { ChangeDetectionStrategy, Component, computed, inject, input, output, signal } from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import { Router, RouterLink } from '@angular/router';
+import type { Invoice, InvoicePaper } from '#shared/invoices/invoice-schema';
+import { readInvoicePaper } from '#shared/invoices/invoices-endpoints';
+import { addressOf } from '../core/api/address-of';
+import { Formats } from '../core/formats/formats';
+import { Words } from '../core/formats/words';
+import { newId } from '../core/new-id';
+import { Notices } from '../core/problems/notices';
+import { ProblemError } from '../core/problems/problem-error';
+import { Session } from '../core/session/session';
+import { InvoiceCalls } from './invoice-calls';
+import { InvoiceLetterForm } from './invoice-letter-form';
+import { InvoiceRelated } from './invoice-related';
+import { InvoiceSums } from './invoice-sums';
+import { isRated, taxCodeNames } from './tax-code-names';
+import { WriteOffForm } from './write-off-form';
+
+const paperNames: Readonly<Record<InvoicePaper, string>> = {
+  'invoice.pdf': $localize`The paper (PDF)`,
+  'invoice.xml': $localize`The same as data (EN 16931, UBL)`,
+};
+
+/** An issued invoice or credit note: what stands on it, what is open, its papers, and what may be done about it. */
+@Component({
+  selector: 'app-invoice-view',
+  imports: [InvoiceLetterForm, InvoiceRelated, InvoiceSums, MatButton, RouterLink, WriteOffForm],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './invoice-view.html',
+  styleUrl: './invoice-view.scss',
+})
+export class InvoiceView {
+  private readonly calls = inject(InvoiceCalls);
+  private readonly router = inject(Router);
+  private readonly notices = inject(Notices);
+  private readonly session = inject(Session);
+  private readonly words = inject(Words);
+  protected readonly formats = inject(Formats);
+
+  readonly invoice = input.required<Invoice>();
+  /** Something moved that what is shown follows from. */
+  readonly changed = output();
+
+  protected readonly opened = signal<'letter' | 'reminder' | 'write-off' | undefined>(undefined);
+  protected readonly isBusy = signal(false);
+  /** Made once for this page: a second press begins nothing twice. */
+  private readonly creditNoteId = newId();
+  protected readonly isIssued = computed(() => this.invoice().state === 'issued');
+  protected readonly isInvoice = computed(() => this.invoice().kind === 'invoice');
+  protected readonly isOwed = computed(() => this.isIssued() && this.isInvoice() && this.invoice().open_minor > 0);
+  protected readonly mayAct = computed(() => this.session.may('owner', 'office') && this.isIssued());
+  protected readonly mayWriteOff = computed(() => this.session.may('owner') && this.isOwed());
+  protected readonly mayCredit = computed(
+    () => this.mayAct() && this.isInvoice() && this.invoice().credited_minor < this.invoice().due_minor,
+  );
+  protected readonly papers = computed(() => {
+    const { id, papers } = this.invoice();
+    return papers.map((paper) => ({
+      name: paperNames[paper],
+      address: addressOf(readInvoicePaper, { params: { invoiceId: id, paper } }),
+    }));
+  });
+  protected readonly lines = computed(() => {
+    const { content, totals, currency } = this.invoice();
+    return content.lines.map((line, place) => ({
+      ...line,
+      amount: this.formats.moneyIn(currency, totals.lineNets_minor[place] ?? 0),
+      count: this.words.say('paper-invoice-quantity', {
+        quantity: this.formats.number(Number(line.quantity), 6),
+        unit: line.unit,
+      }),
+      price: this.formats.number(Number(line.price), 6, this.formats.currencyDigits()),
+      rate: isRated(line.tax.code)
+        ? this.formats.figure('percent', Number(line.tax.percent))
+        : taxCodeNames[line.tax.code],
+    }));
+  });
+
+  protected close(): void {
+    this.opened.set(undefined);
+  }
+
+  protected done(): void {
+    this.close();
+    this.changed.emit();
+  }
+
+  protected async credit(): Promise<void> {
+    if (this.isBusy()) return;
+    this.isBusy.set(true);
+    try {
+      await this.calls.beginCreditNote(this.invoice().id, this.creditNoteId);
+      await this.router.navigate(['/accounts/invoices', this.creditNoteId]);
+    } catch (error) {
+      if (!(error instanceof ProblemError)) throw error;
+      this.notices.complain(error.message);
+    } finally {
+      this.isBusy.set(false);
+    }
+  }
+}

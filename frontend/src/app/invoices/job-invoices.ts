@@ -1,0 +1,111 @@
+import { ChangeDetectionStrategy, Component, computed, inject, input, resource, signal } from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import { Router, RouterLink } from '@angular/router';
+import type { ContractAccountAnswer } from '#shared/invoices/contract-account-endpoints';
+import type { StageClaim } from '#shared/invoices/stage-claim';
+import type { Job } from '#shared/jobs/job-schema';
+import { Formats } from '../core/formats/formats';
+import { newId } from '../core/new-id';
+import { Notices } from '../core/problems/notices';
+import { ProblemError } from '../core/problems/problem-error';
+import { Session } from '../core/session/session';
+import { claimName } from './claim-names';
+import { InvoiceCalls } from './invoice-calls';
+import { invoiceKindNames } from './invoice-names';
+import { StandingMark } from './standing-mark';
+import { ValuationForm } from './valuation-form';
+
+type Part = ContractAccountAnswer['parts'][number];
+
+/** What of a job's contract is invoiced and left, what may be invoiced next, and every invoice of the job. */
+@Component({
+  selector: 'app-job-invoices',
+  imports: [MatButton, RouterLink, StandingMark, ValuationForm],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './job-invoices.html',
+  styleUrl: './job-invoices.scss',
+})
+export class JobInvoices {
+  private readonly calls = inject(InvoiceCalls);
+  private readonly router = inject(Router);
+  private readonly notices = inject(Notices);
+  private readonly session = inject(Session);
+  protected readonly formats = inject(Formats);
+
+  readonly job = input.required<Job>();
+
+  /** Asked anew whenever the job was changed, since its contract may have been. */
+  private readonly asked = computed(() => ({ jobId: this.job().id, at: this.job().changedAt }), {
+    equal: (one, other) => one.jobId === other.jobId && one.at === other.at,
+  });
+  private readonly contractReading = resource({
+    params: () => this.asked(),
+    loader: ({ params, abortSignal }) => this.calls.contract(params.jobId, abortSignal),
+  });
+  private readonly listReading = resource({
+    params: () => this.asked(),
+    loader: ({ params, abortSignal }) => this.calls.list({ jobId: params.jobId, limit: 100 }, undefined, abortSignal),
+  });
+  protected readonly contract = computed(() =>
+    this.contractReading.hasValue() ? (this.contractReading.value() ?? undefined) : undefined,
+  );
+  protected readonly invoices = computed(() => (this.listReading.hasValue() ? this.listReading.value().items : []));
+  protected readonly problem = computed(
+    () => this.contractReading.error()?.message ?? this.listReading.error()?.message ?? '',
+  );
+  protected readonly mayDraft = computed(() => this.session.may('owner', 'office'));
+  protected readonly isBusy = signal(false);
+  /** The part of which a share done is being entered. */
+  protected readonly valued = signal<string | undefined>(undefined);
+  protected readonly kindNames = invoiceKindNames;
+  /** Made once for each claim: a second press drafts nothing twice. */
+  private readonly ids = new Map<string, string>();
+
+  protected readonly parts = computed(() =>
+    (this.contract()?.parts ?? []).map((part) => ({
+      ...part,
+      next: part.next.map((next) => ({ ...next, title: claimName(next, this.formats) })),
+      firstWork: part.next.find(({ claim }) => claim.of === 'work')?.claim,
+    })),
+  );
+  /** The share of the contract that is invoiced, for the bar; figures stand beside it. */
+  protected readonly share_percent = computed(() => {
+    const contract = this.contract();
+    if (!contract || contract.gross_minor <= 0) return 0;
+    const standing_minor = contract.invoiced_minor - contract.credited_minor;
+    return Math.max(0, Math.min(100, Math.round((standing_minor / contract.gross_minor) * 100)));
+  });
+
+  protected async draft(part: Pick<Part, 'issueId'>, claim: StageClaim): Promise<void> {
+    if (this.isBusy()) return;
+    this.isBusy.set(true);
+    const { issueId } = part;
+    const key = JSON.stringify([issueId, claim]);
+    const invoiceId = this.ids.get(key) ?? newId();
+    this.ids.set(key, invoiceId);
+    try {
+      await this.calls.beginStage(this.job().id, { invoiceId, issueId, claim });
+      await this.router.navigate(['/accounts/invoices', invoiceId]);
+    } catch (error) {
+      this.complain(error);
+      this.contractReading.reload();
+      this.listReading.reload();
+    } finally {
+      this.isBusy.set(false);
+    }
+  }
+
+  protected async plan({ issueId }: Pick<Part, 'issueId'>, claim: StageClaim, day: string): Promise<void> {
+    try {
+      await this.calls.planStage(this.job().id, { issueId, claim, plannedOn: day === '' ? null : day });
+    } catch (error) {
+      this.complain(error);
+    }
+    this.contractReading.reload();
+  }
+
+  private complain(error: unknown): void {
+    if (!(error instanceof ProblemError)) throw error;
+    this.notices.complain(error.message);
+  }
+}
