@@ -415,6 +415,19 @@ describe('A calendar for other programs', () => {
     expect((await owner.call(listFeeds)).body.items).toHaveLength(2);
   });
 
+  test('is not there any more for somebody whose access has ended', async () => {
+    const { actor, visitor } = api.ours.people.bench;
+    const { content } = await shopWith(api.ours, api.ours.people.bench);
+    const { secret } = await feed(visitor, content.people[0].id);
+    expect((await read(secret)).status).toBe(200);
+    const people = await api.app.accounts.people.list(api.ours.id);
+    const version = people.find(({ id }) => id === actor.membershipId)?.version ?? 0;
+    await api.platform.database.transaction(() =>
+      api.app.accounts.people.changeAccess(api.ours.people.owner.actor, { id: actor.membershipId, version }, true),
+    );
+    expect((await read(secret)).status).toBe(404);
+  });
+
   test('given another address leads nowhere by the old one', async () => {
     await shopWith(api.ours, api.ours.people.bench);
     const { params, secret } = await feed(owner, null);

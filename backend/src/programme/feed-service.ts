@@ -5,6 +5,7 @@ import type { Feed } from '#shared/programme/calendar-feed-schema';
 import { currencyDigits } from '#shared/money/currency-digits';
 import { Rejection } from '#shared/problems/rejection';
 import { formatsFor } from '#shared/units/formats-for';
+import type { Accounts } from '../accounts';
 import type { Audit } from '../audit';
 import type { Config } from '../platform/config/config';
 import { ownOrigin } from '../platform/config/own-origin';
@@ -18,6 +19,7 @@ import type { FeedRepository } from './feed-repository';
 interface Parts extends Pick<BenchParts, 'shops' | 'workshops' | 'clock'> {
   readonly feeds: FeedRepository;
   readonly bench: BenchService;
+  readonly people: Pick<Accounts['people'], 'list'>;
   readonly audit: Audit['service'];
   readonly config: Config;
 }
@@ -99,7 +101,7 @@ export class FeedService {
   async file(secret: string): Promise<FileAnswer> {
     const { feeds, bench, workshops, clock } = this.parts;
     const row = await feeds.bySecretHash(hashOf(secret));
-    if (!row) throw new Rejection('not-found', 'problem-not-found');
+    if (!row || (await this.hasLeft(row))) throw new Rejection('not-found', 'problem-not-found');
     const now = clock.now();
     const noted = row.readAt?.getTime() ?? 0;
     if (now.getTime() - noted > noted_milliseconds) await feeds.write(row.workshopId, row.id, { readAt: now });
@@ -117,6 +119,16 @@ export class FeedService {
       media: 'text/calendar; charset=utf-8',
       shownInPage: true,
     });
+  }
+
+  /** Somebody whose access to the workshop has ended reads its calendars no more, whoever made them. */
+  private async hasLeft({ workshopId, personId }: FeedRow): Promise<boolean> {
+    if (personId === null) return false;
+    const shop = await this.parts.shops.shop(workshopId);
+    const membershipId = shop.people.find(({ id }) => id === personId)?.membershipId;
+    if (!membershipId) return false;
+    const members = await this.parts.people.list(workshopId);
+    return members.some(({ id, disabledAt }) => id === membershipId && disabledAt !== null);
   }
 
   /** Who only works at the bench makes and takes back nothing but their own. */

@@ -35,6 +35,8 @@ export interface ProgrammeFeature {
   readonly programmes: ProgrammeService;
   readonly holds: HoldService;
   readonly marks: MarkService;
+  readonly board: BoardService;
+  readonly bench: BenchService;
   readonly routes: readonly Route[];
 }
 
@@ -80,12 +82,17 @@ export function openProgramme(platform: Platform, needs: ProgrammeNeeds): Progra
     log,
   });
   const whatIfs = new WhatIfService({ ...parts, priced: needs.estimates.priced });
+  const board = new BoardService(parts);
   const bench = new BenchService(parts);
   const marks = new MarkService({ ...parts, bench });
-  const feeds = new FeedService({ ...parts, bench, config, feeds: new FeedRepository(database) });
+  const feeds = new FeedService({
+    ...{ ...parts, bench, config },
+    feeds: new FeedRepository(database),
+    people: needs.accounts.people,
+  });
   const routes = [
     ...programmeRoutes({ shops: parts.shops, programmes, solutions, holds, whatIfs }),
-    ...boardRoutes({ board: new BoardService(parts), bench, marks, feeds }),
+    ...boardRoutes({ board, bench, marks, feeds }),
   ];
-  return { shops: parts.shops, programmes, holds, marks, routes };
+  return { shops: parts.shops, programmes, holds, marks, board, bench, routes };
 }
