@@ -14,12 +14,7 @@ export interface Place {
 export const places: readonly Place[] = [
   { path: 'bench', label: $localize`Your day`, icon: 'bench', roles: ['bench'] },
   { path: 'jobs', label: $localize`Jobs`, icon: 'jobs', roles: ['owner', 'estimator', 'office', 'bench'] },
-  {
-    path: 'programme',
-    label: $localize`Programme`,
-    icon: 'programme',
-    roles: ['owner', 'estimator', 'bench', 'office'],
-  },
+  { path: 'programme', label: $localize`Programme`, icon: 'programme', roles: ['owner', 'estimator', 'office'] },
   { path: 'rates', label: $localize`Rates`, icon: 'rates', roles: ['owner', 'estimator'] },
   { path: 'leaf', label: $localize`Leaf`, icon: 'leaf', roles: ['owner', 'estimator', 'office'] },
   { path: 'clients', label: $localize`Clients`, icon: 'clients', roles: ['owner', 'estimator', 'office'] },

@@ -1,0 +1,91 @@
+import { ChangeDetectionStrategy, Component, computed, inject, resource, signal } from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import { RouterLink } from '@angular/router';
+import { minutesOf, programmeFrame } from '#shared/programme/programme-frame';
+import type { BoardAnswer } from '#shared/programme/board-schema';
+import { Formats } from '../../core/formats/formats';
+import { NOW } from '../../core/now';
+import { EmptyState } from '../../ui/page/empty-state';
+import { PageHeader } from '../../ui/page/page-header';
+import { Skeleton } from '../../ui/page/skeleton';
+import { ProgrammeParts } from '../programme-parts';
+import { DatedRibbon } from '../ribbon/dated-ribbon';
+import { RibbonTable } from '../ribbon/ribbon-table';
+import { BoardClient } from './board-client';
+import { BoardLots, openOf } from './board-lots';
+import { LoadTable } from './load-table';
+
+const weeks = 26;
+
+/** All accepted jobs and held offers on one calendar, the load by grade and week, and whatever is promised twice. */
+@Component({
+  selector: 'app-board-page',
+  imports: [
+    DatedRibbon,
+    EmptyState,
+    LoadTable,
+    MatButton,
+    PageHeader,
+    ProgrammeParts,
+    RibbonTable,
+    RouterLink,
+    Skeleton,
+  ],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './board-page.html',
+  styleUrl: './board-page.scss',
+})
+export class BoardPage {
+  private readonly client = inject(BoardClient);
+  private readonly formats = inject(Formats);
+  private readonly now = inject(NOW);
+
+  protected readonly jobName = $localize`Job`;
+  protected readonly chosen = signal<string | undefined>(undefined);
+  protected readonly reading = resource({ loader: ({ abortSignal }) => this.client.read({ weeks }, abortSignal) });
+  protected readonly board = computed<BoardAnswer | undefined>(() =>
+    this.reading.hasValue() ? this.reading.value() : undefined,
+  );
+  protected readonly about = computed(() => {
+    const board = this.board();
+    if (!board || board.jobs.length === 0) return '';
+    const count = (standing: string) =>
+      this.formats.number(board.jobs.filter((job) => job.standing === standing).length, 0);
+    return $localize`${count('accepted')}:accepted: accepted, ${count('held')}:held: held`;
+  });
+  protected readonly frame = computed(() => {
+    const board = this.board();
+    return board && programmeFrame(board.firstDay, board.timeZone);
+  });
+  protected readonly now_minutes = computed(() => {
+    const frame = this.frame();
+    return frame && minutesOf(this.now().toISOString(), frame);
+  });
+  protected readonly lots = computed(() => {
+    const [board, frame] = [this.board(), this.frame()];
+    if (!board || !frame) return [];
+    const people = new Map(board.people.map(({ id, name }) => [id, name]));
+    return new BoardLots(this.formats, frame, people).of(board.jobs);
+  });
+  protected readonly open = computed(() => {
+    const [board, frame] = [this.board(), this.frame()];
+    return board && frame ? openOf(board, frame) : [];
+  });
+  protected readonly chosenTask = computed(() =>
+    this.lots()
+      .flatMap(({ tasks }) => tasks)
+      .find(({ id }) => id === this.chosen()),
+  );
+  protected readonly clashes = computed(() => (this.board()?.clashes ?? []).map((clash) => this.clashText(clash)));
+
+  private clashText({ name, startsAt, endsAt, estimateIds }: BoardAnswer['clashes'][number]): string {
+    const jobs = (this.board()?.jobs ?? []).filter((job) => estimateIds.includes(job.estimateId));
+    const titles = jobs.map(({ title }) => title).join(', ');
+    const [day, from, to] = [
+      this.formats.dayOf(startsAt, 'full'),
+      this.formats.time(startsAt),
+      this.formats.time(endsAt),
+    ];
+    return $localize`${name}:name: is promised twice on ${day}:day:, ${from}:from: to ${to}:to:: ${titles}:jobs:.`;
+  }
+}
