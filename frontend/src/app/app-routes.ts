@@ -23,6 +23,16 @@ export const appRoutes: Routes = [
         loadChildren: () => import('./estimates/estimates-routes').then(({ estimatesRoutes }) => estimatesRoutes),
       },
       {
+        path: 'programme',
+        canMatch: [roleGuard('owner', 'estimator', 'office')],
+        loadChildren: () => import('./programme/programme-routes').then(({ programmeRoutes }) => programmeRoutes),
+      },
+      {
+        path: 'bench',
+        canMatch: [roleGuard('owner', 'estimator', 'office', 'bench')],
+        loadChildren: () => import('./programme/programme-routes').then(({ benchRoutes }) => benchRoutes),
+      },
+      {
         path: 'rates',
         canMatch: [roleGuard('owner', 'estimator')],
         loadChildren: () => import('./rate-cards/rate-cards-routes').then(({ rateCardsRoutes }) => rateCardsRoutes),
