@@ -56,7 +56,6 @@ async function measure(): Promise<readonly Measure[]> {
       unit: 'times as fast',
       bound: { atLeast: 10 },
     },
-    },
     { what: 'four times the lots', figure: large_ms / small_ms, unit: 'times the time', bound: { atMost: 16 } },
   ]);
 }
