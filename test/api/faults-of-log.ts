@@ -22,7 +22,12 @@ export function noteCookie(value: string): void {
 export function noteSecretsOf(body: unknown): void {
   if (body === null || typeof body !== 'object') return;
   const entries = body as Record<string, unknown>;
-  for (const name of ['password', 'current', 'token']) noteSecret(entries[name]);
+  for (const name of ['password', 'current', 'token', 'secret']) noteSecret(entries[name]);
+}
+
+/** Notes the secret of an address that was made: it stands behind # or in the query. */
+export function noteSecretOfAddress(address: unknown): void {
+  if (typeof address === 'string') noteSecret(/(?:#|secret=)([\w-]{22,})/.exec(address)?.[1]);
 }
 
 /** What is wrong with a log: lines that hold a secret, and events that are not one line of JSON. */

@@ -2,7 +2,7 @@ import type { Express } from 'express';
 import request, { type Response, type Test } from 'supertest';
 import { signIn, readSession } from '#shared/accounts/session-endpoints';
 import type { Endpoint } from '#shared/actor/endpoint';
-import { noteCookie, noteSecret, noteSecretsOf } from './faults-of-log';
+import { noteCookie, noteSecret, noteSecretOfAddress, noteSecretsOf } from './faults-of-log';
 
 /** What one call brings along; everything is optional so that a test may leave it out. */
 export interface Parts {
@@ -32,10 +32,12 @@ export class Visitor {
     if (this.cookie) test.set('cookie', this.cookie);
     test.on(
       'response',
-      ({ headers, body }: { headers: Record<string, string[] | undefined>; body?: { token?: unknown } }) => {
+      ({ headers, body }: { headers: Record<string, string[] | undefined>; body?: Record<string, unknown> }) => {
         for (const line of headers['set-cookie'] ?? []) this.keep(line.split(';')[0] ?? '');
-        if (typeof body?.token === 'string') this.token = body.token;
+        if (typeof body?.['token'] === 'string') this.token = body['token'];
         noteSecret(this.token);
+        noteSecretOfAddress(body?.['link']);
+        noteSecretOfAddress(body?.['address']);
       },
     );
     return test;
@@ -67,6 +69,7 @@ export class Visitor {
     if (parts.version !== undefined) test.set('if-match', `"${parts.version}"`);
     if (parts.key !== undefined) test.set('idempotency-key', parts.key);
     if (endpoint.upload && parts.file) return test.attach(endpoint.upload, parts.file.bytes, parts.file.name);
+    noteSecretsOf(parts.query);
     noteSecretsOf(parts.body);
     return parts.body === undefined ? test : test.send(parts.body as object);
   }

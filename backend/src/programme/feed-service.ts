@@ -117,7 +117,6 @@ export class FeedService {
     return new FileAnswer(Buffer.from(text, 'utf8'), {
       name: 'bolewright.ics',
       media: 'text/calendar; charset=utf-8',
-      shownInPage: true,
     });
   }
 
