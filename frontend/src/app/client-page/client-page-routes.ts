@@ -23,4 +23,14 @@ export const clientPageRoutes: Routes = [
     title: $localize`Your estimate`,
     loadComponent: () => import('./client-issue-page').then(({ ClientIssuePage }) => ClientIssuePage),
   },
+  {
+    path: 'invoices/:invoiceId',
+    title: $localize`Your invoice`,
+    loadComponent: () => import('./client-invoice-page').then(({ ClientInvoicePage }) => ClientInvoicePage),
+  },
+  {
+    path: 'payments/:checkoutId',
+    title: $localize`Your payment`,
+    loadComponent: () => import('./client-payment-page').then(({ ClientPaymentPage }) => ClientPaymentPage),
+  },
 ];

@@ -67,8 +67,9 @@ export class DraftLine {
   }
 
   /** What charges no tax has no rate. */
-  protected follow(code: string): void {
-    if (!isRated(code as TaxCode)) this.form().control(`${this.path()}.tax.percent`).setValue('0');
+  protected follow(): void {
+    if (!isRated(this.form().control<TaxCode>(`${this.path()}.tax.code`).value))
+      this.form().control(`${this.path()}.tax.percent`).setValue('0');
   }
 
   protected remove(): void {
