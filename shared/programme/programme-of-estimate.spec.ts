@@ -149,6 +149,28 @@ describe('Leaf laid on size', () => {
     expect(made.findings).toContainEqual(expect.objectContaining({ code: 'programme-in-portions' }));
   });
 
+  it('might be laid on another size of the card, each once, with its own tack and window', () => {
+    const [portion] = sizes;
+    const at = (name: string) =>
+      made.otherSizes
+        .find((size) => size.name === name)
+        ?.lags.filter(({ fromTaskId }) => fromTaskId === portion.taskId)
+        .map(({ toPoint, least, most, paceId }) => [toPoint, least, most, paceId]);
+    expect(made.otherSizes.map(({ name }) => name)).toEqual([
+      '3-hour oil size',
+      '12-hour oil size',
+      'Water-borne size',
+    ]);
+    expect(at('12-hour oil size')).toEqual([
+      ['start', 12 * hour, null, 'oil'],
+      ['end', 0, 22 * hour, 'oil'],
+    ]);
+    expect(at('Water-borne size')?.[0]).toEqual(['start', 20, null, 'water']);
+    const ids = new Set(made.request.lags.map(({ id }) => id));
+    expect(made.otherSizes.flatMap(({ lags }) => lags).every(({ id }) => ids.has(id))).toBe(true);
+    expect(programmeFor([panel]).otherSizes).toEqual([]);
+  });
+
   it('is worked in as many portions, by as many hands, as somebody says', () => {
     const lots = [{ lotId: 'piece/oil-quick', portions: 9, crew: 2, mostPeople: 3, places: null }];
     const asked = programmeFor([large], { inputs: { lots } });

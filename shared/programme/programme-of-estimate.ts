@@ -12,6 +12,7 @@ import { lotLags } from '#shared/programme/lot-lags';
 import type { ItemTask, ProgrammeApproval } from '#shared/programme/lot-programme';
 import { lotTasks, type LotToPlan, type PlannedBlock, type PortionStep } from '#shared/programme/lot-tasks';
 import { lotsInOrder } from '#shared/programme/lots-in-order';
+import { otherSizes, type OtherSizeOfLot } from '#shared/programme/other-sizes';
 import { peopleOfShop, placesOfShop } from '#shared/programme/people-of-shop';
 import type { PlannedLot } from '#shared/programme/planned-lot';
 import { placeHoldsOf } from '#shared/programme/place-holds-of';
@@ -47,6 +48,8 @@ export interface EstimateProgramme {
   readonly request: ProgrammeRequest;
   readonly items: readonly ProgrammeItem[];
   readonly approvals: readonly ProgrammeApproval[];
+  /** Sizes that might help where laying finds no time. */
+  readonly otherSizes: readonly OtherSizeOfLot[];
   readonly findings: readonly Finding[];
 }
 
@@ -184,5 +187,6 @@ export function programmeOfEstimate(asked: ProgrammeOfEstimateInput): EstimatePr
   const { paces, findings } = dryingPaces(airOf(asked), asked.frame, asked.card.drying);
   const request = requestOf(asked, { tasks, lags, approvals, lots, paces });
   const items = tasks.map(({ item }) => item);
-  return { request, items, approvals, findings: [...findings, ...requestFindings(request, items, asked.shop)] };
+  const told = [...findings, ...requestFindings(request, items, asked.shop)];
+  return { request, items, approvals, otherSizes: otherSizes(lots, lags, asked.card), findings: told };
 }

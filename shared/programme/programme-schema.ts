@@ -140,6 +140,14 @@ export const programmeRequestSchema = z.custom<ProgrammeRequest>(
   (value) => typeof value === 'object' && value !== null,
 );
 
+/** Another size for a lot, of a build-up of the card. */
+const otherSizeSchema = z.strictObject({
+  lotId: z.string(),
+  buildUpId: z.string(),
+  name: z.string(),
+  lags: z.custom<ProgrammeRequest['lags']>(Array.isArray),
+});
+
 /** How minutes of a programme are read: minute 0 is `startsAt`, the start of `firstDay` in the workshop's zone; they run on without a break. */
 export const programmeFrame = { firstDay: day, startsAt: instant, timeZone: z.string() };
 
@@ -155,6 +163,8 @@ export const programmeSchema = z.strictObject({
   items: z.array(programmeItemSchema),
   /** What is approved by each of the request's approvals. */
   approvals: z.array(programmeApprovalSchema),
+  /** What might be tried where laying on size finds no time: lags that stand in place of those of the same ids. */
+  otherSizes: z.array(otherSizeSchema),
   /** What stands in the way of planning, or is to be known of it, before anything is planned. */
   findings: z.array(findingSchema),
   plan: programmePlanSchema.nullable(),

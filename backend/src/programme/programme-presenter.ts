@@ -59,7 +59,7 @@ function presentPlan({ row, frame }: ProgrammeContext, { standing }: ShownProgra
 /** A programme as it is sent; the plan in the minutes of the frame that is sent with it. */
 export function presentProgramme(context: ProgrammeContext, shown: ShownProgramme): ProgrammeAnswer {
   const { whole, row, inputs, marks, frame } = context;
-  const { request, items, approvals, findings } = shown.planned;
+  const { request, items, approvals, findings, otherSizes } = shown.planned;
   return {
     estimateId: whole.estimate.id,
     version: row?.version ?? 0,
@@ -70,6 +70,7 @@ export function presentProgramme(context: ProgrammeContext, shown: ShownProgramm
     items,
     approvals: approvals.map((approval) => presentApproval(approval, frame)),
     findings,
+    otherSizes,
     ...presentPlan(context, shown),
     hold: shown.hold,
   } as ProgrammeAnswer;
