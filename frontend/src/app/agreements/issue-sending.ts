@@ -72,8 +72,12 @@ export class IssueSending {
   }
 
   protected async copy(): Promise<void> {
-    await globalThis.navigator.clipboard.writeText(this.link());
-    this.isCopied.set(true);
+    try {
+      await globalThis.navigator.clipboard.writeText(this.link());
+      this.isCopied.set(true);
+    } catch {
+      this.notices.complain($localize`The browser does not let it be copied. Select the link and copy it by hand.`);
+    }
   }
 
   protected async revoke(access: Access): Promise<void> {
