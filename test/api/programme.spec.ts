@@ -12,6 +12,8 @@ import {
 import type { BenchDay } from '#shared/programme/bench-day-schema';
 import type { BenchTask } from '#shared/programme/bench-task';
 import type { BoardAnswer } from '#shared/programme/board-schema';
+import { planDifferences } from '#shared/programme/plan-differences';
+import type { Programme } from '#shared/programme/programme-plan';
 import { removeJob } from '#shared/jobs/jobs-endpoints';
 import {
   holdSlot,
@@ -209,6 +211,31 @@ describe('Planning on the server', () => {
     const ended = await read(id);
     expect(['stopped', 'done']).toContain(ended.state);
     expect((await programmeOf(api.ours, estimateId)).plan?.finish_minutes).toBe(ended.finish_minutes);
+  });
+
+  test('keeping the plan moves nothing that need not move', async () => {
+    const { estimateId, programme } = await plannedSample(api.ours, api.ours.people.bench);
+    const tone = programme.plan?.tasks.find(({ taskId }) => taskId.includes('/tone/'));
+    const later = new Date(instant(programme, (tone?.start_minutes ?? 0) + 7 * 1440)).toISOString();
+    const pins = [{ taskId: tone?.taskId ?? '', at: later }];
+    const body = { ...programme.inputs, pins };
+    const { version } = await told<ProgrammeAnswer>(owner, keepProgramme, {
+      ...at(estimateId),
+      version: programme.version,
+      body,
+    });
+    const asked = { ...at(estimateId), body: { seconds: 2, keepsPlan: true } };
+    const { id } = await told<SolutionAnswer>(owner, solveProgramme, asked);
+    await api.platform.tasks.runDue();
+    expect((await read(id)).state).toBe('done');
+    const now = await programmeOf(api.ours, estimateId);
+    expect([now.version, now.isCurrent]).toEqual([version + 1, true]);
+    const moved = planDifferences(programme.plan as Programme, now.plan as Programme).map(({ taskId }) => taskId);
+    const after = programme.items
+      .slice(programme.items.findIndex(({ taskId }) => taskId === tone?.taskId))
+      .map(({ taskId }) => taskId);
+    expect(moved.length).toBeGreaterThan(0);
+    expect(moved.filter((taskId) => !after.includes(taskId))).toEqual([]);
   });
 
   test('of a programme that was changed meanwhile is not kept', async () => {
