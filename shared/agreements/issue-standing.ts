@@ -1,4 +1,4 @@
-import type { IssueState } from '#shared/estimates/issue-schema';
+import type { IssueState } from '#shared/estimates/issue-state';
 
 /** Where an issue stands for its client: `open` may be accepted. */
 export const issueStandings = ['open', 'accepted', 'declined', 'replaced', 'past-validity'] as const;

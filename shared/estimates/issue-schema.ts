@@ -1,11 +1,8 @@
 import * as z from 'zod';
+import { issueStates } from '#shared/estimates/issue-state';
 import type { LineDifference } from '#shared/estimates/line-differences';
 import { workKinds } from '#shared/estimates/price/work-kind';
 import { day, paragraphs } from '#shared/problems/entry-schema';
-
-/** Where an issue stands with the client; only sent, accepted and declined are marked by hand. */
-export const issueStates = ['issued', 'sent', 'accepted', 'declined', 'replaced'] as const;
-export type IssueState = (typeof issueStates)[number];
 
 /** What a person says when issuing: a note, and whether a rate card no longer in force is meant. */
 export const issueRequestSchema = z.strictObject({

@@ -1,4 +1,5 @@
-import type { IssueState, Paper } from '#shared/estimates/issue-schema';
+import type { Paper } from '#shared/estimates/issue-schema';
+import type { IssueState } from '#shared/estimates/issue-state';
 import { column } from '../platform/database/columns';
 import type { Database } from '../platform/database/database';
 import type { WorkshopRow } from '../platform/database/workshop-rows';

@@ -1,5 +1,5 @@
 import type { Figures } from '#shared/estimates/figures';
-import type { IssueState } from '#shared/estimates/issue-schema';
+import type { IssueState } from '#shared/estimates/issue-state';
 import { Rejection } from '#shared/problems/rejection';
 import type { IssueRow } from './issue-model';
 import type { WholeEstimate } from './whole-estimate';

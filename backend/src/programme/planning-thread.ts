@@ -1,16 +1,8 @@
 import { join } from 'node:path';
 import { Worker } from 'node:worker_threads';
+import type { PlanningQuestion } from '#shared/programme/planning-question';
 import type { Programme } from '#shared/programme/programme-plan';
-import type { ProgrammeRequest, ProgrammeSearch } from '#shared/programme/programme-request';
 import { threadFile } from '../platform/threads/thread-file';
-
-/** What a thread plans, and for how long; its stop is shared memory, so that it is seen in the midst of planning. */
-export interface PlanningQuestion {
-  readonly request: ProgrammeRequest;
-  readonly search: Omit<ProgrammeSearch, 'limit' | 'onBetter'>;
-  readonly seconds: number;
-  readonly stop: SharedArrayBuffer;
-}
 
 type Told = { readonly better: Programme } | { readonly plan: Programme };
 

@@ -13,9 +13,8 @@ import {
 } from '#shared/programme/programme-endpoints';
 import { mount, type Route } from '../platform/http/mount';
 import type { HoldService } from './hold-service';
-import type { ProgrammeRow } from './programme-model';
+import { standingProgramme, standingShop } from './standing-presenter';
 import type { ProgrammeService } from './programme-service';
-import type { ShopRow } from './shop-model';
 import type { ShopService } from './shop-service';
 import type { SolutionService } from './solution-service';
 import type { WhatIfService } from './what-if-service';
@@ -27,10 +26,6 @@ interface Services {
   readonly holds: HoldService;
   readonly whatIfs: WhatIfService;
 }
-
-/** What stands now, beside what somebody wanted to keep on top of an older version. */
-const standingShop = ({ version, content }: ShopRow) => ({ version, content });
-const standingProgramme = ({ version, inputs }: ProgrammeRow) => ({ version, inputs });
 
 const shopRoutes = ({ shops }: Services): Route[] => [
   mount(readShop, ({ actor }) => shops.read(actor.workshopId)),

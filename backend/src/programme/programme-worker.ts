@@ -1,6 +1,6 @@
 import { parentPort, workerData } from 'node:worker_threads';
+import type { PlanningQuestion } from '#shared/programme/planning-question';
 import { programme } from '#shared/programme/programme';
-import type { PlanningQuestion } from './planning-thread';
 
 const { request, search, seconds, stop } = workerData as PlanningQuestion;
 const stopped = new Int32Array(stop);

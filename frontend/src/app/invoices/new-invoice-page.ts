@@ -3,19 +3,17 @@ import { toSignal } from '@angular/core/rxjs-interop';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { Router, RouterLink } from '@angular/router';
-import * as z from 'zod';
-import { identifier } from '#shared/problems/entry-schema';
 import { holdWhileDirty } from '../core/forms/hold-while-dirty';
 import { schemaForm } from '../core/forms/schema-form';
 import { newId } from '../core/new-id';
+import { Saving } from '../core/saving/saving';
 import { ClientField, JobCalls } from '../jobs';
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
 import { FormComplaint } from '../ui/field/form-complaint';
 import { PageHeader } from '../ui/page/page-header';
 import { FirstDraft } from './first-draft';
-
-const beginSchema = z.strictObject({ clientId: identifier, jobId: identifier.nullable() });
+import { newInvoiceSchema } from './new-invoice-schema';
 
 /** Begins a plain invoice: whom it is for, and of which job. */
 @Component({
@@ -59,12 +57,13 @@ const beginSchema = z.strictObject({ clientId: identifier, jobId: identifier.nul
 export class NewInvoicePage {
   private readonly router = inject(Router);
   private readonly jobCalls = inject(JobCalls);
+  private readonly saving = inject(Saving);
   private readonly drafts = inject(FirstDraft);
 
   readonly client = input<string>();
   readonly job = input<string>();
 
-  protected readonly form = schemaForm(beginSchema, { clientId: null, jobId: null });
+  protected readonly form = schemaForm(newInvoiceSchema, { clientId: null, jobId: null });
   private readonly clientId = toSignal(this.form.group.controls.clientId.valueChanges, { initialValue: null });
   private readonly reading = resource({
     params: () => this.clientId() ?? undefined,
@@ -85,6 +84,8 @@ export class NewInvoicePage {
 
   protected async begin(): Promise<void> {
     const isBegun = await this.form.send(({ clientId, jobId }) => this.drafts.begin(this.invoiceId, clientId, jobId));
-    if (isBegun) await this.router.navigate(['/accounts/invoices', this.invoiceId], { replaceUrl: true });
+    if (!isBegun) return;
+    this.saving.expect(0);
+    await this.router.navigate(['/accounts/invoices', this.invoiceId], { replaceUrl: true });
   }
 }

@@ -1,4 +1,4 @@
-import type { IssueState } from '#shared/estimates/issue-schema';
+import type { IssueState } from '#shared/estimates/issue-state';
 
 /** Where an issue stands with the client. */
 export const issueStateNames: Readonly<Record<IssueState, string>> = {
