@@ -35,9 +35,9 @@ export const ageNames: Readonly<Record<Age, string>> = {
 };
 
 export const paymentWayNames: Readonly<Record<PaymentWay, string>> = {
-  bank: $localize`By bank`,
-  cash: $localize`In cash`,
-  card: $localize`By card`,
+  bank: $localize`by bank`,
+  cash: $localize`in cash`,
+  card: $localize`by card`,
 };
 
 /** Where a paper stands, in a word. */

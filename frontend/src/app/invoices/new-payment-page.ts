@@ -20,6 +20,7 @@ import { Formats } from '../core/formats/formats';
 import { holdWhileDirty } from '../core/forms/hold-while-dirty';
 import { schemaForm } from '../core/forms/schema-form';
 import { Notices } from '../core/problems/notices';
+import { Saving } from '../core/saving/saving';
 import { ClientField } from '../jobs';
 import { AmountField } from '../ui/field/amount-field';
 import { Entry } from '../ui/field/entry';
@@ -47,6 +48,7 @@ export class NewPaymentPage {
   private readonly router = inject(Router);
   private readonly notices = inject(Notices);
   protected readonly formats = inject(Formats);
+  private readonly saving = inject(Saving);
   private readonly today = workshopToday();
   private readonly key = new DeedKey();
 
@@ -114,6 +116,7 @@ export class NewPaymentPage {
       this.notices.say($localize`${amount}:amount: from ${clientName}:client: is entered.`);
     });
     if (!isEntered) return;
+    this.saving.expect(0);
     const came = this.invoice();
     await this.router.navigate(came ? ['/accounts/invoices', came] : ['/accounts/payments']);
   }
