@@ -56,13 +56,13 @@ test('in a body', async () => {
   const foreign = new Map<Endpoint, Parts>();
   for (const endpoint of withBody) {
     const person = api.ours.people[mayCall(endpoint)];
-    foreign.set(endpoint, await allRows[endpoint.name]!.prepare(api.theirs, api, person));
+    foreign.set(endpoint, await allRows[endpoint.name].prepare(api.theirs, api, person));
   }
   const before = await theirRows();
   let tried = 0;
   for (const [endpoint, theirs] of foreign) {
     const person = api.ours.people[mayCall(endpoint)];
-    const ours = await allRows[endpoint.name]!.prepare(api.ours, api, person);
+    const ours = await allRows[endpoint.name].prepare(api.ours, api, person);
     for (const path of firstOfEachKind(idsIn(ours.body))) {
       tried += 1;
       const body = withId(ours.body, path, at(theirs.body, path) ?? at(theirs.params, ['estimateId']));
@@ -93,7 +93,7 @@ test('in a query', async () => {
   let tried = 0;
   for (const endpoint of ofRoles.filter(({ query, media }) => query !== undefined && media === undefined)) {
     const person = api.ours.people[mayCall(endpoint)];
-    const parts = await allRows[endpoint.name]!.prepare(api.ours, api, person);
+    const parts = await allRows[endpoint.name].prepare(api.ours, api, person);
     const takesIds = Object.entries(endpoint.query!.shape).filter(([, field]) => isTakingIds(field, jobId));
     for (const [name] of takesIds) {
       for (const id of ids) {

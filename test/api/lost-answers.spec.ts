@@ -60,7 +60,7 @@ test.each(['invite', 'issueEstimate', 'issueInvoice', 'recordPayment'])(
   '%s: the lost answer comes with the same key, and it was done once',
   async (name) => {
     const endpoint = endpoints.find((one) => one.name === name) as Endpoint;
-    const parts = await allRows[name]!.prepare(api.ours, api, api.ours.people.owner);
+    const parts = await allRows[name].prepare(api.ours, api, api.ours.people.owner);
     const before = await sumsOfRows(api.platform.database, api.ours.id);
     expect(await askDoomed(await startDoomed(), endpoint, parts)).toEqual({ answer: 'cut off', signal: 'SIGKILL' });
     const done = await sumsOfRows(api.platform.database, api.ours.id);
