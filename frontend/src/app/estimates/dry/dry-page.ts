@@ -37,6 +37,7 @@ import { WoodMoisture } from './wood-moisture';
     WoodMoisture,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
+  host: { '[class.dated]': 'isProgramme()' },
   providers: [DryCautions, DryLots, PlaceExplanation],
   templateUrl: './dry-page.html',
   styleUrl: './dry-page.scss',

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { dayOfInstant } from '#shared/calendar/day-of-instant';
+import { groupedBy } from '#shared/units/grouped-by';
 import { Formats } from '../../core/formats/formats';
 import { NOW } from '../../core/now';
 import { holdNames } from '../../drying';
@@ -13,40 +14,56 @@ import { ProgrammeStore } from './programme-store';
   imports: [MatButton],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <h3 i18n>Approvals</h3>
-    <ul class="plain">
-      @for (one of approvals(); track one.approvalId) {
-        <li>
-          <span class="name">
-            {{ one.title }}
-            <span class="muted">{{ one.state }}</span>
-          </span>
-          @if (mayEdit()) {
-            @if (one.givenAt) {
-              <button matButton type="button" (click)="take(one.approvalId)" i18n>Take it back</button>
-            } @else {
-              <input
-                #given
-                class="entry dense"
-                type="date"
-                i18n-aria-label
-                aria-label="Approved on {{ one.title }}"
-                [max]="today"
-                [value]="today"
-              />
-              <button matButton="outlined" type="button" (click)="give(one.approvalId, given.value)" i18n>
-                Approved
-              </button>
+    <details [open]="approvals().length < 7">
+      <summary>
+        <h3 i18n>Approvals</h3>
+        <span class="muted" i18n>{{ waiting() }} waited for</span>
+      </summary>
+      <ul class="plain">
+        @for (one of approvals(); track one.title) {
+          <li>
+            <span class="name">
+              {{ one.title }}
+              <span class="muted">{{ one.state }}</span>
+            </span>
+            @if (mayEdit()) {
+              @if (one.givenAt) {
+                <button matButton type="button" (click)="take(one.ids)" i18n>Take it back</button>
+              } @else {
+                <input
+                  #given
+                  class="entry dense"
+                  type="date"
+                  i18n-aria-label
+                  aria-label="Approved on {{ one.title }}"
+                  [max]="today"
+                  [value]="today"
+                />
+                <button matButton="outlined" type="button" (click)="give(one.ids, given.value)" i18n>Approved</button>
+              }
             }
-          }
-        </li>
-      }
-    </ul>
+          </li>
+        }
+      </ul>
+    </details>
   `,
   styles: `
     :host {
       display: grid;
       gap: 4px;
+    }
+
+    summary {
+      display: flex;
+      gap: 10px;
+      align-items: baseline;
+      min-height: 36px;
+      cursor: pointer;
+    }
+
+    h3 {
+      font-size: 1.125rem;
+      line-height: 1.5rem;
     }
 
     li {
@@ -81,31 +98,34 @@ export class ApprovalList {
   readonly mayEdit = input.required<boolean>();
 
   protected readonly today = dayOfInstant(this.now().getTime(), this.formats.timeZone());
-  protected readonly approvals = computed(() =>
-    (this.store.answer()?.approvals ?? []).map((one) => {
-      const days = this.formats.figure('days', one.usual_days);
+  /** What waits for the same thing is approved at once. */
+  protected readonly approvals = computed(() => {
+    const same = groupedBy(this.store.answer()?.approvals ?? [], ({ hold, name }) => `${holdNames[hold]}, ${name}`);
+    return [...same].map(([title, all]) => {
+      const givenAt = all.every((one) => one.givenAt !== null) ? all[0].givenAt : null;
+      const days = this.formats.figure('days', Math.max(...all.map((one) => one.usual_days)));
       return {
-        ...one,
-        title: `${holdNames[one.hold]}, ${one.name}`,
-        state: one.givenAt
-          ? $localize`approved on ${this.formats.dayOf(one.givenAt)}:day:`
+        ...{ title, givenAt, ids: all.map(({ approvalId }) => approvalId) },
+        state: givenAt
+          ? $localize`approved on ${this.formats.dayOf(givenAt)}:day:`
           : $localize`waited for, usually ${days}:days:`,
       };
-    }),
-  );
+    });
+  });
+  protected readonly waiting = computed(() => this.approvals().filter(({ givenAt }) => givenAt === null).length);
 
-  protected give(approvalId: string, day: string): void {
+  protected give(ids: readonly string[], day: string): void {
     const [answer, frame] = [this.store.answer(), this.store.frame()];
     if (!answer || !frame || day === '') return;
     const at = day === this.today ? this.now().toISOString() : morningOf(day, frame);
-    void this.store.keepInputs({ approvals: [...this.others(approvalId), { approvalId, at }] });
+    void this.store.keepInputs({ approvals: [...this.others(ids), ...ids.map((approvalId) => ({ approvalId, at }))] });
   }
 
-  protected take(approvalId: string): void {
-    void this.store.keepInputs({ approvals: this.others(approvalId) });
+  protected take(ids: readonly string[]): void {
+    void this.store.keepInputs({ approvals: this.others(ids) });
   }
 
-  private others(approvalId: string) {
-    return (this.store.answer()?.inputs.approvals ?? []).filter((one) => one.approvalId !== approvalId);
+  private others(ids: readonly string[]) {
+    return (this.store.answer()?.inputs.approvals ?? []).filter((one) => !ids.includes(one.approvalId));
   }
 }

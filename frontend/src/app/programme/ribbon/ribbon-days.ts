@@ -18,6 +18,8 @@ export interface RibbonMark {
 const namedDay_px = 64;
 const namedWeek_px = 84;
 const hourLine_px = 14;
+/** Days thinner than this would be more night than day: only whole closed days are shaded. */
+const shadedNight_px = 56;
 
 const hoursOf = (day_px: number): readonly number[] =>
   day_px / 24 < hourLine_px ? [] : day_px / 24 < 44 ? [6, 12, 18] : [3, 6, 9, 12, 15, 18, 21];
@@ -55,7 +57,7 @@ export function closedStretches(
   open: readonly MomentSpan[],
   { part, scale }: { readonly part: DrawnPart; readonly scale: RibbonScale },
 ): Stretch[] {
-  const least_minutes = scale.hour_px * 24 < 12 ? 24 * 60 : 0;
+  const least_minutes = scale.hour_px * 24 < shadedNight_px ? 24 * 60 : 0;
   const found: Stretch[] = [];
   let from = scale.first_minutes;
   const take = (until: number): void => {

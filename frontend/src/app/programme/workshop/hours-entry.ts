@@ -16,7 +16,6 @@ import { hoursText, readHours } from './hours-text';
         appEntry
         type="text"
         autocomplete="off"
-        class="figures"
         i18n-placeholder
         placeholder="closed"
         [disabled]="disabled()"
