@@ -103,7 +103,7 @@ export class InvoiceDraft {
   protected addLine(): void {
     const before = this.content().lines.at(-1);
     this.form.insert('lines', this.lines().length, {
-      ...{ id: newId(), name: '', description: '', quantity: '1', unit: before?.unit ?? 'C62', price: '' },
+      ...{ id: newId(), name: '', description: '', quantity: '1', unit: 'C62', price: '' },
       ...{ baseQuantity: '1', allowancesCharges: [], tax: { ...(before?.tax ?? { code: 'S', percent: '' }) } },
     });
   }
