@@ -8,7 +8,7 @@ interface Toll {
   readonly half: number;
 }
 
-/** Kills a database of ours under sixteen writers, three times. */
+/** Kills a database of ours under sixteen writers, ten times. */
 async function killed(...args: string[]): Promise<Toll> {
   const { stdout } = await promisify(execFile)(process.execPath, [join(__dirname, 'kill-database.mjs'), ...args]);
   return JSON.parse(stdout) as Toll;
