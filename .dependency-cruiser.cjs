@@ -17,7 +17,7 @@ const testSupport = '^(test|frontend/src/test)/';
 const schemaOrEndpoints = '^(shared/(endpoints|.+(-schema|-endpoints|/endpoint))|frontend/src/app/.+-schema)\\.ts$';
 const calculator = '^shared/(?!endpoints\\.ts|.+(-schema|-endpoints|/endpoint)\\.ts).+\\.ts$';
 const worker = '-worker\\.ts$';
-const paperWorker = '^backend/src/documents/paper-worker\\.ts$';
+const paperWorker = '^backend/src/(documents|invoices)/(invoice-)?paper-worker\\.ts$';
 const serverEntry = '^backend/src/[^/]+\\.ts$';
 const pageEntry = '^frontend/src/(app/)?[^/]+\\.ts$';
 
@@ -201,7 +201,7 @@ const paperThread = [
   never('The thread of papers sees its own feature only', {
     comment: 'It is given everything a paper says, and asks nobody.',
     from: { path: paperWorker },
-    to: { pathNot: ['^backend/src/documents/', '^(node:)?worker_threads$'] },
+    to: { pathNot: ['^backend/src/$1/', '^(node:)?worker_threads$'] },
   }),
 ];
 

@@ -11,6 +11,7 @@ const options = {
     main: 'backend/src/main.ts',
     'risk-worker': 'backend/src/estimates/risk-worker.ts',
     'paper-worker': 'backend/src/documents/paper-worker.ts',
+    'invoice-paper-worker': 'backend/src/invoices/invoice-paper-worker.ts',
     'programme-worker': 'backend/src/programme/programme-worker.ts',
   },
   outdir: 'dist/server',

@@ -161,7 +161,8 @@ export const invoices = migration('0050-invoices', [
     kind VARCHAR(80) NOT NULL,
     content LONGTEXT NOT NULL,
     received_at DATETIME(3) NOT NULL,
-    checkout_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NULL
+    checkout_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NULL,
+    KEY payment_events_by_checkout (checkout_id, received_at)
   ) ENGINE=InnoDB`,
   `CREATE TABLE IF NOT EXISTS reminders (
     workshop_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,

@@ -31,7 +31,7 @@ export interface App {
 function openTowardsClients(platform: Platform, needs: Pick<App, 'accounts' | 'audit' | 'jobs' | 'estimates'>) {
   const agreements = openAgreements(platform, needs);
   const contract = agreements.contracts.contract.bind(agreements.contracts);
-  const invoices = openInvoices(platform, { ...needs, contract });
+  const invoices = openInvoices(platform, { ...needs, contract, letters: agreements.letters });
   const clientInvoices = openClientInvoices(platform, invoices);
   const clientPage = openClientPage({ ...needs, agreements, invoices: clientInvoices });
   return { agreements, invoices, clientPage, clientInvoices };

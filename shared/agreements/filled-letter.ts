@@ -40,7 +40,10 @@ export function filledLetter(words: LetterText, values: LetterValues): FilledLet
   const plain: Writing = (text) => text;
   return {
     subject: oneLine(written(words.subject, values, plain)),
-    text: `${written(words.text, values, plain).trim()}\n`,
+    // A value that is empty leaves one empty line, not three.
+    text: `${written(words.text, values, plain)
+      .trim()
+      .replace(/(\r?\n){3,}/g, '\n\n')}\n`,
     html: htmlOf(words.text, values),
   };
 }

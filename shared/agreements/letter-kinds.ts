@@ -17,7 +17,7 @@ export type LetterKind = (typeof letterKinds)[number];
 const everywhere = ['client', 'workshop'] as const;
 const ofJob = [...everywhere, 'job', 'link'] as const;
 const ofEstimate = [...ofJob, 'number', 'total'] as const;
-const ofInvoice = [...ofEstimate, 'day', 'open'] as const;
+const ofInvoice = [...ofEstimate, 'day', 'open', 'note'] as const;
 
 /** The placeholders each kind of letter knows; whatever else stands in braces is refused. */
 export const letterPlaceholders: Readonly<Record<LetterKind, readonly string[]>> = {
@@ -28,9 +28,9 @@ export const letterPlaceholders: Readonly<Record<LetterKind, readonly string[]>>
   'sign-in': [...everywhere, 'link'],
   invoice: ofInvoice,
   'credit-note': ofInvoice,
-  receipt: ofInvoice,
+  receipt: [...ofEstimate, 'day', 'open'],
   reminder: ofInvoice,
-  statement: [...everywhere, 'link', 'day', 'open'],
+  statement: [...everywhere, 'link', 'day', 'open', 'note'],
 };
 
 /** What a letter of a kind is of no use without. */

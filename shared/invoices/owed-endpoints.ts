@@ -1,7 +1,13 @@
 import * as z from 'zod';
 import { endpoint, sameForPriced } from '#shared/actor/endpoint';
 import { oneInvoice } from '#shared/invoices/invoices-endpoints';
-import { journalSchema, owedSchema, periodQuery, statementSchema } from '#shared/invoices/payment-schema';
+import {
+  journalSchema,
+  owedSchema,
+  periodQuery,
+  statementLetterSchema,
+  statementSchema,
+} from '#shared/invoices/payment-schema';
 import { identifier, paragraphs } from '#shared/problems/entry-schema';
 
 const oneClient = z.strictObject({ clientId: identifier });
@@ -35,6 +41,7 @@ export const readStatementPaper = endpoint({
   path: '/api/clients/:clientId/statement.pdf',
   callers: ['owner', 'estimator', 'office'],
   params: oneClient,
+  atOnce: 4,
   query: periodQuery,
   media: 'application/pdf',
   answers: sameForPriced(z.unknown()),
@@ -81,5 +88,18 @@ export const remindOfInvoice = endpoint({
   params: oneInvoice,
   body: z.strictObject({ note: paragraphs(1000) }),
   idempotent: true,
+  answers: {},
+});
+
+export const sendStatement = endpoint({
+  name: 'sendStatement',
+  summary: 'Mail a client their account from one day to another, as a PDF, with a note of one’s own',
+  method: 'post',
+  path: '/api/clients/:clientId/statement-letters',
+  callers: ['owner', 'office'],
+  params: oneClient,
+  body: statementLetterSchema,
+  idempotent: true,
+  atOnce: 2,
   answers: {},
 });

@@ -5,7 +5,7 @@ import { ledgerKinds } from '#shared/invoices/ledger-entry';
 import { currencyEntry } from '#shared/money/currency-schema';
 import { complain } from '#shared/problems/complaints-of';
 import { complainAt } from '#shared/problems/card-entry-schema';
-import { day, identifier, line, optionalLine } from '#shared/problems/entry-schema';
+import { day, identifier, line, optionalLine, paragraphs } from '#shared/problems/entry-schema';
 
 /** How money came or went; `card` is never entered by hand. */
 export const paymentWays = ['bank', 'cash', 'card'] as const;
@@ -110,9 +110,12 @@ export const journalSchema = z.strictObject({
 });
 export type Journal = z.infer<typeof journalSchema>;
 
-export const periodQuery = z
-  .strictObject({ from: day, to: day })
-  .refine(({ from, to }) => from <= to, { ...complain('invoice-period-turned'), path: ['to'] });
+const period = { from: day, to: day };
+const isInOrder = ({ from, to }: { from: string; to: string }): boolean => from <= to;
+const turned = { ...complain('invoice-period-turned'), path: ['to'] };
+
+export const periodQuery = z.strictObject(period).refine(isInOrder, turned);
+export const statementLetterSchema = z.strictObject({ ...period, note: paragraphs(1000) }).refine(isInOrder, turned);
 
 /** Where a payment by card stands. */
 export const checkoutStates = ['open', 'paid', 'expired', 'refused'] as const;
@@ -129,3 +132,7 @@ export const checkoutSchema = z.strictObject({
   open_minor: z.int(),
 });
 export type Checkout = z.infer<typeof checkoutSchema>;
+
+/** What the payment service told of a payment nobody here has begun; the service itself says more of it under this id. */
+export const unknownPaymentEventSchema = z.strictObject({ id: z.string(), kind: z.string(), receivedAt: z.string() });
+export type UnknownPaymentEvent = z.infer<typeof unknownPaymentEventSchema>;

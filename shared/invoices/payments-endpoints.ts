@@ -9,6 +9,7 @@ import {
   paymentSchema,
   refundEntrySchema,
   shareEntrySchema,
+  unknownPaymentEventSchema,
   writeOffEntrySchema,
 } from '#shared/invoices/payment-schema';
 import { identifier } from '#shared/problems/entry-schema';
@@ -91,4 +92,13 @@ export const takePaymentEvent = endpoint({
   callers: 'anyone',
   signature: 'stripe-signature',
   answers: {},
+});
+
+export const listUnknownPaymentEvents = endpoint({
+  name: 'listUnknownPaymentEvents',
+  summary: 'What the payment service told of payments nobody here has begun, the newest hundred',
+  method: 'get',
+  path: '/api/payment-events',
+  callers: ['owner', 'office'],
+  answers: sameForPriced(z.strictObject({ items: z.array(unknownPaymentEventSchema) })),
 });

@@ -19,7 +19,10 @@ function numberFindings({ content, seller }: InvoiceInHand, codes: ReadonlySet<T
     ...when(codes.has('AE') && vatId === '' && companyNumber === '', ['refuse', 'invoice-buyer-number']),
     ...when(codes.has('K') && vatId === '', ['refuse', 'invoice-buyer-vat-number']),
     // Under O no VAT number is written at all (BR-O-02), so something else has to say who sells (BR-CO-26).
-    ...when(codes.has('O') && seller.companyNumber === '' && seller.taxNumber === '', ['refuse', 'invoice-seller-company-number']),
+    ...when(codes.has('O') && seller.companyNumber === '' && seller.taxNumber === '', [
+      'refuse',
+      'invoice-seller-company-number',
+    ]),
   ];
 }
 

@@ -8,7 +8,13 @@ import {
   listClientInvoices,
 } from '#shared/client-page/client-invoices-endpoints';
 import type { Checkout, Payment } from '#shared/invoices/payment-schema';
-import { askCheckout, listPayments, refundPayment, takePaymentEvent } from '#shared/invoices/payments-endpoints';
+import {
+  askCheckout,
+  listPayments,
+  listUnknownPaymentEvents,
+  refundPayment,
+  takePaymentEvent,
+} from '#shared/invoices/payments-endpoints';
 import { readOwed } from '#shared/invoices/owed-endpoints';
 import { ledgerFaults } from './ledger';
 import { acceptedIssue } from './sample-client-visit';
@@ -59,7 +65,10 @@ describe('a payment by card', () => {
     expect(await openOf(invoiceId)).toBe(0);
     expect(await paymentsOf(clientId)).toMatchObject([{ way: 'card', amount_minor: 12_000, credit_minor: 0 }]);
     expect(await ask(checkoutId)).toMatchObject({ state: 'paid', open_minor: 0, url: null });
-    expect((await api.mails())[0].headers).toContain('Receipt for invoice');
+    const [receipt] = await api.mails();
+    expect(receipt.headers).toContain('thank you for your payment');
+    for (const written of [receipt.text, receipt.html])
+      expect(written).toMatch(/120\.00.*What is still open of it: .*0\.00/s);
   });
 
   it('is recorded by asking where no event ever comes, and once where it comes late', async () => {
@@ -208,6 +217,15 @@ describe('an event', () => {
     expect([(await post(unknown)).status, (await post(strange)).status]).toEqual([204, 204]);
     const after = await rowsOf();
     expect([Number(after.events) - Number(before.events), after.payments]).toEqual([2, before.payments]);
+    const list = await api.as('office').call(listUnknownPaymentEvents);
+    const { items } = list.body as { items: { id: string; kind: string }[] };
+    expect(
+      items
+        .slice(0, 2)
+        .map(({ kind }) => kind)
+        .sort(),
+    ).toEqual(['checkout.session.completed', 'invoice.sang_a_song']);
+    expect(list.text).not.toContain('cs_other');
   });
 });
 

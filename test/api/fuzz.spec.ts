@@ -2,9 +2,10 @@ import type { Response } from 'supertest';
 import type { Endpoint } from '#shared/actor/endpoint';
 import { roles, type Role } from '#shared/actor/role';
 import { endpoints } from '#shared/endpoints';
-import { allRows } from './rows/all-rows';
+import type { ClientCall } from './matrix-row';
+import { allRows, clientRows } from './rows/all-rows';
 import { startApi, type Api } from './start-api';
-import type { Parts, Visitor } from './visitor';
+import type { Visitor } from './visitor';
 
 /**
  * Every body taken apart: each entry in turn missing, of another type, far too long, out of range, or beside one nobody asked for.
@@ -66,6 +67,14 @@ const callerOf = async (endpoint: Endpoint): Promise<{ visitor: Visitor; role: R
   return { role, visitor: isOthers ? (await api.newcomer(api.ours, role)).visitor : api.as(role) };
 };
 
+/** Who calls an endpoint, and a valid call of theirs. */
+const validCall = async (endpoint: Endpoint): Promise<ClientCall> => {
+  if (endpoint.callers === 'client') return clientRows[endpoint.name].visit(api.ours, api);
+  const { visitor, role } = await callerOf(endpoint);
+  const caller = { ...api.ours.people[role], visitor };
+  return { visitor, parts: await allRows[endpoint.name].prepare(api.ours, api, caller) };
+};
+
 const isRefusedWithWords = ({ status, headers, body }: Response): boolean =>
   status < 400 ||
   (status < 500 &&
@@ -74,11 +83,8 @@ const isRefusedWithWords = ({ status, headers, body }: Response): boolean =>
 
 test.each(withBody.map((endpoint) => [endpoint.name, endpoint] as const))(
   '%s',
-  async (name, endpoint) => {
-    const row = allRows[name];
-    const { visitor, role } = await callerOf(endpoint);
-    const caller = { ...api.ours.people[role], visitor };
-    const parts: Parts = await row.prepare(api.ours, api, caller);
+  async (_name, endpoint) => {
+    const { visitor, parts } = await validCall(endpoint);
     const body = parts.body as Json;
     const paths = pathsOf(body).slice(0, most.entriesOfOneBody);
     const bodies = [
@@ -100,9 +106,8 @@ test.each(withBody.map((endpoint) => [endpoint.name, endpoint] as const))(
 
 test.each(withBody.map((endpoint) => [endpoint.name, endpoint] as const))(
   '%s refuses an entry nobody asked for',
-  async (name, endpoint) => {
-    const { visitor, role } = await callerOf(endpoint);
-    const parts = await allRows[name].prepare(api.ours, api, { ...api.ours.people[role], visitor });
+  async (_name, endpoint) => {
+    const { visitor, parts } = await validCall(endpoint);
     for (const surplus of ['workshopId', 'id2', 'status', 'total_minor', 'isAdmin']) {
       const response = await visitor.call(endpoint, { ...parts, body: { ...(parts.body as object), [surplus]: 'x' } });
       expect(response.status).toBe(400);

@@ -19,6 +19,7 @@ import {
 import { startInvoiceSettings } from '#shared/invoices/invoice-settings';
 import type { StageClaim } from '#shared/invoices/stage-claim';
 import { textAt, ublFaults, ublRoot } from '../reference/ubl-check';
+import { keepLetterTemplate } from '#shared/agreements/letters-endpoints';
 import { ledgerFaults } from './ledger';
 import { acceptedIssue } from './sample-client-visit';
 import {
@@ -174,8 +175,37 @@ describe('an issued invoice', () => {
       .call(sendInvoice, { params: { invoiceId }, body: { note: 'With thanks {{7*7}}' }, key: randomUUID() });
     expect(sent.status).toBe(204);
     const [mail] = await api.mails();
-    expect(mail.headers).toMatch(/^Subject: Invoice \d{4}-\d{4} from Herons/m);
-    expect(mail.text).toContain('With thanks {{7*7}}');
+    expect(mail.headers).toMatch(/^Subject: Herons.*: invoice \d{4}-\d{4}/m);
+    for (const written of [mail.text, mail.html]) {
+      expect(written).toContain('With thanks {{7*7}}');
+      expect(written).toContain('120.00');
+      expect(written).toContain('/client/sign-in');
+    }
+    expect(mail.enclosures.map(({ media }) => media)).toEqual(['application/pdf', 'application/xml']);
+  });
+
+  it('goes out in the words of the workshop, where it has its own; a credit note has others', async () => {
+    const words = {
+      kind: 'invoice',
+      subject: 'Our account {number}',
+      text: 'To {client}, about {job}: {total}, by {day}. {note}',
+    };
+    const keep = { body: words, version: 0 };
+    expect((await api.as('owner').call(keepLetterTemplate, keep)).status).toBe(200);
+    const { invoiceId } = await sampleInvoice(api.ours);
+    const note = await issued(api.ours, (await creditDraft(api.ours, invoiceId)).id);
+    const send = (id: string) =>
+      api
+        .as('office')
+        .call(sendInvoice, { params: { invoiceId: id }, body: { note: '<b>Soon</b>' }, key: randomUUID() });
+    expect((await send(invoiceId)).status).toBe(204);
+    const [own] = await api.mails();
+    expect(own.headers).toMatch(/^Subject: Our account \d{4}-\d{4}/m);
+    expect(own.text).toMatch(/about work done for you: .*120\.00, by .+ \d{4}\. <b>Soon<\/b>/);
+    expect(own.html).toContain('&lt;b&gt;Soon&lt;/b&gt;');
+    expect((await send(note.id)).status).toBe(204);
+    const [usual] = await api.mails();
+    expect(usual.headers).toMatch(/^Subject: Herons.*: credit note C\d{4}-\d{4}/m);
   });
 
   it('in a currency of three decimals goes out as a PDF alone, and says so before', async () => {

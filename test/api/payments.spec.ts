@@ -10,6 +10,7 @@ import {
   readStatement,
   readStatementPaper,
   remindOfInvoice,
+  sendStatement,
 } from '#shared/invoices/owed-endpoints';
 import { recordPayment, refundPayment, sharePayment, writeOff } from '#shared/invoices/payments-endpoints';
 import { ledgerFaults } from './ledger';
@@ -246,5 +247,24 @@ describe('what is owed', () => {
     api.clock.move({ minutes: -days });
     expect(mail.headers).toContain('is still open');
     expect(mail.text).toContain('Kindly');
+    expect(mail.html).toContain('Kindly');
+    expect(mail.enclosures.map(({ media }) => media)).toEqual(['application/pdf', 'application/xml']);
+  });
+
+  it('goes to the client as a statement by mail, the same paper enclosed', async () => {
+    const { clientId } = await sampleInvoice(api.ours);
+    const days = { from: wide.from, to: '2099-12-31' };
+    const send = (body: object) =>
+      api.as('office').call(sendStatement, { params: { clientId }, body: { note: '', ...body }, key: randomUUID() });
+    expect((await send({ from: days.to, to: days.from })).status).toBe(400);
+    expect((await send({ ...days, note: 'For your books' })).status).toBe(204);
+    const [mail] = await api.mails();
+    expect(mail.headers).toMatch(/^Subject: Herons.*: what is open/m);
+    for (const written of [mail.text, mail.html]) {
+      expect(written).toContain('120.00');
+      expect(written).toContain('For your books');
+    }
+    expect(mail.enclosures).toMatchObject([{ media: 'application/pdf' }]);
+    expect(mail.enclosures[0].size_bytes).toBeGreaterThan(2_000);
   });
 });

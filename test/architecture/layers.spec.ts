@@ -213,6 +213,7 @@ const breaches: readonly Breach[] = [
     at: 'backend/src/documents/paper-worker.ts',
     text: imports('sequelize'),
   },
+  breach('The thread of papers sees its own feature only', 'backend/src/invoices/invoice-paper-worker.ts', '../jobs'),
   breach('No import runs in a circle', 'shared/jobs/planted-circle.ts', './planted-half'),
   breach('Every import leads somewhere', 'shared/jobs/planted-astray.ts', '#shared/measure/nowhere'),
   breach('Every package is named in package.json', 'backend/src/jobs/stray-service.ts', 'stray'),

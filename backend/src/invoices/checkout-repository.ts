@@ -1,3 +1,4 @@
+import type { UnknownPaymentEvent } from '#shared/invoices/payment-schema';
 import type { Database } from '../platform/database/database';
 import { WorkshopRows } from '../platform/database/workshop-rows';
 import { checkoutTable, type CheckoutRow } from './payment-model';
@@ -40,6 +41,16 @@ export class CheckoutRepository extends WorkshopRows<CheckoutRow> {
       id,
       checkoutId,
     });
+  }
+
+  /** Only the service's name of an event, its kind and when it came: what it holds may be anybody's. */
+  async unknownEvents(): Promise<UnknownPaymentEvent[]> {
+    const rows = await this.database.select<Omit<UnknownPaymentEvent, 'receivedAt'> & { receivedAt: Date }>(
+      `SELECT id, kind, received_at AS receivedAt FROM payment_events WHERE checkout_id IS NULL
+       ORDER BY received_at DESC, id DESC LIMIT 100`,
+      {},
+    );
+    return rows.map(({ receivedAt, ...event }) => ({ ...event, receivedAt: receivedAt.toISOString() }));
   }
 
   private async found(

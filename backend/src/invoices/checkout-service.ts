@@ -1,5 +1,6 @@
 import { v7 as newId } from 'uuid';
 import { currencyDigits } from '#shared/money/currency-digits';
+import type { UnknownPaymentEvent } from '#shared/invoices/payment-schema';
 import { paymentShares } from '#shared/invoices/payment-shares';
 import { Rejection } from '#shared/problems/rejection';
 import type { Doer } from '../audit';
@@ -83,6 +84,11 @@ export class CheckoutService {
     if (!checkout) return;
     await this.parts.checkouts.nameEvent(event.id, checkout.id);
     await this.settle(checkout, event.sessionId);
+  }
+
+  /** Events that spoke of no payment known to any workshop, the newest first. */
+  unknownEvents(): Promise<UnknownPaymentEvent[]> {
+    return this.parts.checkouts.unknownEvents();
   }
 
   private believed(signed: SignedBody): CardEvent {

@@ -1,6 +1,8 @@
 import type { Accounts } from '../accounts';
+import type { Agreements } from '../agreements';
 import type { Audit } from '../audit';
 import type { Jobs } from '../jobs';
+import { ownOrigin } from '../platform/config/own-origin';
 import { WorkshopRows } from '../platform/database/workshop-rows';
 import type { Route } from '../platform/http/mount';
 import type { Platform } from '../platform/platform';
@@ -9,6 +11,7 @@ import { CheckoutService } from './checkout-service';
 import { DraftService } from './draft-service';
 import { InvoiceLetters } from './invoice-letters';
 import { InvoiceNumbers } from './invoice-numbers';
+import { InvoicePaperMaking } from './invoice-paper-making';
 import type { ContractOf, InvoiceParts } from './invoice-parts';
 import { InvoiceReading } from './invoice-reading';
 import { InvoiceRepository } from './invoice-repository';
@@ -24,6 +27,7 @@ import { PaymentService } from './payment-service';
 import { RefundService } from './refund-service';
 import { SettlingService } from './settling-service';
 import { StageDayRepository } from './stage-day-repository';
+import { StatementLetters } from './statement-letters';
 import { StageService } from './stage-service';
 
 export { presentCheckout, presentSummary } from './invoice-presenter';
@@ -50,17 +54,20 @@ export interface InvoicesNeeds {
   readonly accounts: Accounts;
   readonly audit: Audit;
   readonly jobs: Jobs;
+  readonly letters: Agreements['letters'];
   readonly contract: ContractOf;
 }
 
-function partsOf({ database, clock, files, mailbox }: Platform, needs: InvoicesNeeds): InvoiceParts {
-  const { accounts, audit, jobs, contract } = needs;
+function partsOf({ config, database, clock, files }: Platform, needs: InvoicesNeeds): InvoiceParts {
+  const { accounts, audit, jobs, contract, letters } = needs;
   const workshops = accounts.workshops;
   return {
     invoices: new InvoiceRepository(database),
     payments: new PaymentRepository(database),
     settings: new InvoiceSettingsService({ database, workshops, audit: audit.service }),
-    ...{ workshops, jobs, audit: audit.service, files, mailbox, clock, contract },
+    ...{ workshops, jobs, audit: audit.service, files, clock, contract },
+    ...{ clientLetters: letters, clientEntrance: `${ownOrigin(config)}/client/sign-in` },
+    papers: new InvoicePaperMaking(),
   };
 }
 
@@ -82,6 +89,7 @@ export function openInvoices(platform: Platform, needs: InvoicesNeeds): Invoices
     ...parts,
     ...{ database, checkouts: rows, cards, recording, refunds, settling, letters },
   });
+  const statements = new LedgerPapers(parts, ledger);
   const routes = [
     ...invoiceRoutes({ drafts, stages, issuing, reading, settings: parts.settings, letters }),
     ...paymentRoutes({
@@ -89,7 +97,8 @@ export function openInvoices(platform: Platform, needs: InvoicesNeeds): Invoices
       refunds,
       checkouts,
       ledger,
-      papers: new LedgerPapers(parts, ledger),
+      papers: statements,
+      statementLetters: new StatementLetters({ ...parts, ledger, statements }),
       reading,
       letters,
     }),

@@ -1,11 +1,14 @@
 import { v7 as newId } from 'uuid';
 import type { Actor } from '#shared/actor/actor';
+import type { LetterValues } from '#shared/agreements/filled-letter';
 import type { MinorUnits } from '#shared/money/decimal';
 import { Rejection } from '#shared/problems/rejection';
 import type { WordCode, WordValues } from '#shared/words/word-code';
+import type { ClientLetter, LetterFigures } from '../agreements';
+import { words } from '../platform/http/words';
 import type { WorkshopRows } from '../platform/database/workshop-rows';
 import type { InvoiceRow } from './invoice-model';
-import { todayIn, wordsOf, workshopOnPaper, type InvoiceParts } from './invoice-parts';
+import { todayIn, type InvoiceParts } from './invoice-parts';
 import { mustBeIssued, mustBeIssuedInvoice } from './invoice-policy';
 import type { ReminderRow } from './payment-model';
 
@@ -18,28 +21,26 @@ export interface ReceiptLetters {
   receipt(invoice: InvoiceRow, amount_minor: MinorUnits): Promise<void>;
 }
 
-interface Wording {
-  readonly subject: WordCode;
-  readonly text: WordCode;
-  readonly values: WordValues;
+/** A letter about an invoice: its kind, the day it speaks of, and what differs from the invoice itself. */
+interface About {
+  readonly kind: ClientLetter['kind'];
+  readonly day: string;
+  readonly total_minor?: MinorUnits;
+  readonly note?: string;
   readonly encloses: boolean;
 }
 
-/** Letters about invoices: the invoice itself, a reminder, the receipt of a payment by card. */
+/** Letters about invoices in the workshop's words: the invoice itself, a reminder, the receipt of a payment by card. */
 export class InvoiceLetters implements ReceiptLetters {
   constructor(private readonly parts: Parts) {}
 
-  /** Mails an issued invoice with its papers. */
+  /** Mails an issued invoice or credit note with its papers. */
   async send(actor: Actor, invoiceId: string, note: string): Promise<void> {
     const row = await this.parts.invoices.get(actor.workshopId, invoiceId);
     mustBeIssued(row);
     const { email } = row.content.buyer;
     if (email === '') throw new Rejection('conflict', 'letter-no-address');
-    const dueOn = row.dueOn === null ? 'none' : (await wordsOf(this.parts, actor.workshopId)).day(row.dueOn);
-    await this.post(row, {
-      ...{ subject: 'mail-invoice-subject', text: 'mail-invoice-text', encloses: true },
-      values: { due_minor: row.dueMinor, dueOn, note },
-    });
+    await this.post(row, { kind: row.kind, day: row.dueOn ?? row.issuedOn ?? '', note, encloses: true });
     await this.record(actor, row, { code: 'history-invoice-sent', values: { number: row.number ?? '', email } });
   }
 
@@ -53,11 +54,7 @@ export class InvoiceLetters implements ReceiptLetters {
     if (!isOverdue) throw new Rejection('conflict', 'reminder-not-due', { values: { number: number ?? '' } });
     const { name, email } = content.buyer;
     if (email === '') throw new Rejection('conflict', 'reminder-no-address', { values: { name } });
-    const words = await wordsOf(this.parts, workshopId);
-    await this.post(row, {
-      ...{ subject: 'mail-reminder-subject', text: 'mail-reminder-text', encloses: true },
-      values: { open_minor: openMinor, dueOn: words.day(dueOn), note },
-    });
+    await this.post(row, { kind: 'reminder', day: dueOn, note, encloses: true });
     const at = this.parts.clock.now();
     await this.parts.reminders.insert(workshopId, { id: newId(), invoiceId, openMinor, email, at, byName: actor.name });
     await this.record(actor, row, { code: 'history-reminded', values: { client: name, number: number ?? '' } });
@@ -66,28 +63,32 @@ export class InvoiceLetters implements ReceiptLetters {
   /** Thanks for a payment by card, where there is an address to thank. */
   async receipt({ workshopId, id }: InvoiceRow, amount_minor: MinorUnits): Promise<void> {
     const row = await this.parts.invoices.get(workshopId, id);
-    if (row.content.buyer.email === '') return;
-    await this.post(row, {
-      ...{ subject: 'mail-receipt-subject', text: 'mail-receipt-text', encloses: false },
-      values: { amount_minor, isPaid: row.openMinor <= 0 ? 'yes' : 'no' },
+    const day = await todayIn(this.parts, workshopId);
+    await this.post(row, { kind: 'receipt', day, total_minor: amount_minor, encloses: false });
+  }
+
+  private async post(row: InvoiceRow, about: About): Promise<void> {
+    const { workshopId, jobId, content, pdfFileId, xmlFileId } = row;
+    const job = jobId === null ? words('letter-job-none') : (await this.parts.jobs.job(workshopId, jobId)).title;
+    const files = about.encloses ? [pdfFileId, xmlFileId] : [];
+    await this.parts.clientLetters.post(workshopId, {
+      kind: about.kind,
+      client: content.buyer,
+      values: (figures) => this.values(row, about, { job, figures }),
+      enclosures: files.flatMap((fileId) => (fileId === null ? [] : [{ fileId }])),
     });
   }
 
-  private async post(row: InvoiceRow, { subject, text, values, encloses }: Wording): Promise<void> {
-    const { workshopId, content, kind, number, pdfFileId, xmlFileId } = row;
-    const { say } = await wordsOf(this.parts, workshopId);
-    const workshop = await workshopOnPaper(this.parts, workshopId);
-    const name = content.buyer.contact || content.buyer.name;
-    const all = { ...values, kind, number: number ?? '', name, workshop: workshop.name };
-    const files = encloses ? [pdfFileId, xmlFileId].flatMap((fileId) => (fileId === null ? [] : [{ fileId }])) : [];
-    await this.parts.mailbox.post(workshopId, {
-      to: { name: content.buyer.name, email: content.buyer.email },
-      subject: say(subject, all),
-      text: say(text, all).replace(/\n{3,}/g, '\n\n'),
-      from: workshop.name,
-      ...(workshop.email === '' ? {} : { replyTo: workshop.email }),
-      enclosures: files,
-    });
+  private values(
+    { number, currency, dueMinor, openMinor }: InvoiceRow,
+    { day, total_minor = dueMinor, note = '' }: About,
+    { job, figures }: { job: string; figures: LetterFigures },
+  ): LetterValues {
+    return {
+      ...{ job, note, number: number ?? '', link: this.parts.clientEntrance, day: figures.day(day) },
+      total: figures.money(total_minor, currency),
+      open: figures.money(openMinor, currency),
+    };
   }
 
   private record(actor: Actor, { id, jobId }: InvoiceRow, deed: { code: WordCode; values: WordValues }): Promise<void> {

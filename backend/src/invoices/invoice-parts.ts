@@ -2,12 +2,13 @@ import type { Contract } from '#shared/agreements/contract';
 import type { SnapshotWorkshop } from '#shared/estimates/snapshot';
 import { dayOfInstant } from '#shared/calendar/day-of-instant';
 import type { WorkshopService } from '../accounts';
+import type { LetterService } from '../agreements';
 import type { AuditService } from '../audit';
 import { paperWords, type PaperWords } from '../documents';
 import type { Jobs } from '../jobs';
 import type { Clock } from '../platform/clock/clock';
 import type { FileStore } from '../platform/files/file-store';
-import type { Mailbox } from '../platform/mail/mailbox';
+import type { InvoicePaperMaking } from './invoice-paper-making';
 import type { InvoiceRepository } from './invoice-repository';
 import type { InvoiceSettingsService } from './invoice-settings-service';
 import type { PaymentRepository } from './payment-repository';
@@ -24,7 +25,11 @@ export interface InvoiceParts {
   readonly jobs: Jobs;
   readonly audit: AuditService;
   readonly files: FileStore;
-  readonly mailbox: Mailbox;
+  /** Letters to clients, in each workshop's own words. */
+  readonly clientLetters: Pick<LetterService, 'post'>;
+  /** Where a client asks for a way to their papers. */
+  readonly clientEntrance: string;
+  readonly papers: InvoicePaperMaking;
   readonly clock: Clock;
   readonly contract: ContractOf;
 }

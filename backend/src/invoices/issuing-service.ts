@@ -16,7 +16,6 @@ import type { GivenNumber, InvoiceNumbers } from './invoice-numbers';
 import { todayIn, workshopOnPaper, type InvoiceParts } from './invoice-parts';
 import { mustBeDraft, mustBeIssuable, mustBeLeft } from './invoice-policy';
 import type { KeptSettings } from './invoice-settings-service';
-import { invoicePaper } from './paper/invoice-paper';
 import { writtenOffOf, type SettlingService } from './settling-service';
 import type { StageService } from './stage-service';
 import { ublInvoice } from './ubl/ubl-invoice';
@@ -122,7 +121,10 @@ export class IssuingService {
     });
   }
 
-  /** The papers as they stay: data where the currency has a place in it, and the PDF with the data inside. */
+  /**
+   * The papers as they stay: data where the currency has a place in it, and the PDF with the data inside. They bear the number, which is
+   * given in this transaction, so they are set before it ends, in a thread of their own: only who moves money of this workshop waits.
+   */
   private async papers(
     workshopId: string,
     frozen: FrozenInvoice,
@@ -130,7 +132,7 @@ export class IssuingService {
     const xml = isExchangeCurrency(frozen.currency) ? ublInvoice(frozen) : null;
     const { logoFileId } = await this.parts.workshops.get(workshopId);
     const logo = logoFileId ? (await this.parts.workshops.logo(workshopId)).bytes : null;
-    const pdf = await invoicePaper(frozen, { logo, xml });
+    const pdf = await this.parts.papers.invoice(frozen, { logo, xml });
     const save = (ending: string, media: string, bytes: Buffer) =>
       this.parts.files.save(workshopId, {
         name: fileName([frozen.workshop.name, frozen.number], ending),

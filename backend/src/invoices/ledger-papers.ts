@@ -1,9 +1,9 @@
 import { fileName } from '../documents';
+import type { NewFile } from '../platform/files/file-store';
 import { FileAnswer } from '../platform/http/answer';
 import { todayIn, wordsOf, workshopOnPaper, type InvoiceParts } from './invoice-parts';
 import { journalCsv, journalWorkbook } from './journal-workbook';
 import type { Days, LedgerService } from './ledger-service';
-import { statementPaper } from './paper/statement-paper';
 
 const workbookMedia = 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet';
 
@@ -14,11 +14,11 @@ export class LedgerPapers {
     private readonly ledger: LedgerService,
   ) {}
 
-  async statement(workshopId: string, clientId: string, days: Days): Promise<FileAnswer> {
+  async statement(workshopId: string, clientId: string, days: Days): Promise<NewFile> {
     const statement = await this.ledger.statement(workshopId, clientId, days);
     const client = await this.parts.jobs.client(workshopId, clientId);
     const { logoFileId } = await this.parts.workshops.get(workshopId);
-    const bytes = await statementPaper({
+    const bytes = await this.parts.papers.statement({
       workshop: await workshopOnPaper(this.parts, workshopId),
       logo: logoFileId ? (await this.parts.workshops.logo(workshopId)).bytes : null,
       address: [client.contact, client.address],
@@ -26,10 +26,7 @@ export class LedgerPapers {
       madeAt: this.parts.clock.now().toISOString(),
       madeOn: await todayIn(this.parts, workshopId),
     });
-    return new FileAnswer(bytes, {
-      name: fileName([client.name, days.from, days.to], 'pdf'),
-      media: 'application/pdf',
-    });
+    return { bytes, name: fileName([client.name, days.from, days.to], 'pdf'), media: 'application/pdf' };
   }
 
   async journal(workshopId: string, form: 'journal.csv' | 'journal.xlsx', days: Days): Promise<FileAnswer> {

@@ -6,16 +6,19 @@ import {
   readStatement,
   readStatementPaper,
   remindOfInvoice,
+  sendStatement,
 } from '#shared/invoices/owed-endpoints';
 import {
   askCheckout,
   listPayments,
+  listUnknownPaymentEvents,
   recordPayment,
   refundPayment,
   sharePayment,
   takePaymentEvent,
   writeOff,
 } from '#shared/invoices/payments-endpoints';
+import { FileAnswer } from '../platform/http/answer';
 import { mount, type Route } from '../platform/http/mount';
 import type { CheckoutService } from './checkout-service';
 import type { InvoiceLetters } from './invoice-letters';
@@ -25,6 +28,7 @@ import type { LedgerPapers } from './ledger-papers';
 import type { LedgerService } from './ledger-service';
 import type { PaymentService } from './payment-service';
 import type { RefundService } from './refund-service';
+import type { StatementLetters } from './statement-letters';
 
 interface Parts {
   readonly recording: PaymentService;
@@ -34,16 +38,21 @@ interface Parts {
   readonly papers: LedgerPapers;
   readonly reading: InvoiceReading;
   readonly letters: InvoiceLetters;
+  readonly statementLetters: StatementLetters;
 }
 
-const owedRoutes = ({ ledger, papers, letters }: Parts): Route[] => [
+const owedRoutes = ({ ledger, papers, letters, statementLetters }: Parts): Route[] => [
   mount(readOwed, ({ actor }) => ledger.owed(actor.workshopId)),
   mount(readStatement, ({ actor, params, query }) => ledger.statement(actor.workshopId, params.clientId, query)),
-  mount(readStatementPaper, ({ actor, params, query }) => papers.statement(actor.workshopId, params.clientId, query)),
+  mount(readStatementPaper, async ({ actor, params, query }) => {
+    const paper = await papers.statement(actor.workshopId, params.clientId, query);
+    return new FileAnswer(paper.bytes, paper);
+  }),
   mount(readJournal, ({ actor, query }) => ledger.journal(actor.workshopId, query)),
   mount(readJournalList, ({ actor, query }) => papers.journal(actor.workshopId, 'journal.csv', query)),
   mount(readJournalWorkbook, ({ actor, query }) => papers.journal(actor.workshopId, 'journal.xlsx', query)),
   mount(remindOfInvoice, ({ actor, params, body }) => letters.remind(actor, params.invoiceId, body.note)),
+  mount(sendStatement, ({ actor, params, body }) => statementLetters.send(actor, params.clientId, body)),
 ];
 
 export const paymentRoutes = (parts: Parts): Route[] => {
@@ -65,6 +74,7 @@ export const paymentRoutes = (parts: Parts): Route[] => {
       const { open_minor } = await reading.get(actor.workshopId, checkout.invoiceId);
       return presentCheckout(checkout, open_minor);
     }),
+    mount(listUnknownPaymentEvents, async () => ({ items: await checkouts.unknownEvents() })),
     mount(takePaymentEvent, async ({ signed }) => {
       if (signed) await checkouts.take(signed);
     }),

@@ -44,21 +44,22 @@ export const agreements = {
   'letter-sign-in-subject': '{workshop}: your papers',
   'letter-sign-in-text':
     'Dear {client},\n\nsomebody, most likely you, asked for a way to your papers at {workshop}. This link opens them for an hour:\n\n{link}\n\nIf it was not you, nothing has to be done.\n\n{workshop}\n',
+  'letter-job-none': 'work done for you',
   'letter-invoice-subject': '{workshop}: invoice {number}',
   'letter-invoice-text':
-    'Dear {client},\n\ninvoice {number} for {job} is attached. It comes to {total} and is due on {day}.\n\n{link}\n\nWith kind regards\n{workshop}\n',
+    'Dear {client},\n\ninvoice {number} for {job} is attached. It comes to {total} and is due on {day}.\n\n{note}\n\nHere you can have a link to your papers sent to you, and pay by card where we take cards:\n\n{link}\n\nWith kind regards\n{workshop}\n',
   'letter-credit-note-subject': '{workshop}: credit note {number}',
   'letter-credit-note-text':
-    'Dear {client},\n\ncredit note {number} for {job} is attached. It comes to {total}.\n\nWith kind regards\n{workshop}\n',
+    'Dear {client},\n\ncredit note {number} for {job} is attached. It comes to {total}.\n\n{note}\n\nWith kind regards\n{workshop}\n',
   'letter-receipt-subject': '{workshop}: thank you for your payment',
   'letter-receipt-text':
     'Dear {client},\n\nwe have received {total} towards invoice {number} on {day}. What is still open of it: {open}.\n\nWith kind regards\n{workshop}\n',
   'letter-reminder-subject': '{workshop}: invoice {number} is still open',
   'letter-reminder-text':
-    'Dear {client},\n\ninvoice {number} for {job} was due on {day}, and {open} of it is still open. If it has crossed with your payment, please take this as settled.\n\n{link}\n\nWith kind regards\n{workshop}\n',
+    'Dear {client},\n\ninvoice {number} for {job} was due on {day}, and {open} of it is still open. If it has crossed with your payment, please take this as settled. The invoice is attached once more.\n\n{note}\n\nHere you can have a link to your papers sent to you, and pay by card where we take cards:\n\n{link}\n\nWith kind regards\n{workshop}\n',
   'letter-statement-subject': '{workshop}: what is open',
   'letter-statement-text':
-    'Dear {client},\n\non {day}, {open} was open in all. The statement is attached.\n\nWith kind regards\n{workshop}\n',
+    'Dear {client},\n\non {day}, {open} was open in all. The statement is attached.\n\n{note}\n\nWith kind regards\n{workshop}\n',
   'notice-question-subject': '{client} asks about {number}',
   'notice-question-text':
     '{client} writes about {number}, {job}:\n\n{text}\n\nAnswer in the job itself, so that it stands in the thread:\n\n{link}\n',

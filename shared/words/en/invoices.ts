@@ -83,6 +83,7 @@ export const invoices = {
   'history-refunded': 'Gave {amount_minor} back to {client}.',
   'history-written-off': 'Wrote off {amount_minor} of invoice {number}.',
   'history-reminded': 'Reminded {client} of invoice {number}.',
+  'history-statement-sent': 'Sent {client} a statement to {email}.',
   'history-checkout-begun': 'Payment of invoice {number} by card was begun.',
   'history-stage-planned': 'Planned a stage of payment.',
 
@@ -172,15 +173,4 @@ export const invoices = {
   'journal-kind-refund': 'Refund',
   'journal-kind-write-off': 'Written off',
   'journal-all': 'Together',
-
-  // Mails
-  'mail-invoice-subject': '{kind, select, invoice {Invoice} other {Credit note}} {number} from {workshop}',
-  'mail-invoice-text':
-    'Dear {name},\n\nhere is {kind, select, invoice {invoice} other {credit note}} {number} over {due_minor}{dueOn, select, none {} other {, to be paid by {dueOn}}}.\n\n{note}\n\n{workshop}\n',
-  'mail-reminder-subject': 'Invoice {number} is still open',
-  'mail-reminder-text':
-    'Dear {name},\n\nof invoice {number}, due on {dueOn}, {open_minor} is still open. If it has crossed this letter, thank you, and please think no more of it.\n\n{note}\n\n{workshop}\n',
-  'mail-receipt-subject': 'Receipt for invoice {number}',
-  'mail-receipt-text':
-    'Dear {name},\n\nthank you: {amount_minor} for invoice {number} has arrived by card. {isPaid, select, yes {The invoice is settled.} other {Part of it is still open.}}\n\n{workshop}\n',
 } as const;

@@ -160,6 +160,7 @@ export const invoicesRows: MatrixRows = {
   },
   // Whoever is no payment service cannot sign, so a call as the matrix makes it is refused; checkouts.spec.ts has the signed ones.
   takePaymentEvent: { prepare: () => ({ body: { id: 'evt_unsigned' } }), status: 400 },
+  listUnknownPaymentEvents: { prepare: () => ({}) },
   readOwed: {
     prepare: async (workshop) => {
       await sampleInvoice(workshop);
@@ -179,6 +180,13 @@ export const invoicesRows: MatrixRows = {
     prepare: async (workshop) => ({ ...(await oneInvoice(workshop)), body: { note: workshop.mark }, ...keyed() }),
     // It is due in a fortnight yet; invoices.spec.ts reminds of one that is overdue.
     status: 409,
+  },
+  sendStatement: {
+    prepare: async (workshop) => {
+      const params = { clientId: await sampleClient(workshop) };
+      return { params, body: { ...thisYear, note: workshop.mark }, ...keyed() };
+    },
+    history: 'history-statement-sent',
   },
 };
 
