@@ -57,17 +57,24 @@ export const sampleDraft = (more: Partial<Invoice> = {}): Invoice =>
 
 export const pageOf = <T>(items: readonly T[]) => ({ items, next: null, count: items.length, countIsExact: true });
 
+interface Question {
+  readonly text: string;
+  readonly yes: string;
+}
+
 /** One page of accounts under its address, with what it asks the server for in one's own hands. */
 export class BooksVisit {
-  /** What was asked before something that cannot be undone; answered with yes. */
-  readonly questions: { readonly text: string; readonly yes: string }[] = [];
   private readonly http = TestBed.inject(HttpTestingController);
 
-  private constructor(private readonly harness: RouterTestingHarness) {}
+  private constructor(
+    private readonly harness: RouterTestingHarness,
+    /** What was asked before something that cannot be undone; answered with yes. */
+    readonly questions: readonly Question[],
+  ) {}
 
   static async begin(page: Type<unknown>, at: { path: string; address: string; roles?: readonly Role[] }) {
-    let visit: BooksVisit | undefined;
-    const confirm = { ask: (question: never) => (visit?.questions.push(question), Promise.resolve(true)) };
+    const questions: Question[] = [];
+    const confirm = { ask: (question: Question) => (questions.push(question), Promise.resolve(true)) };
     TestBed.configureTestingModule({
       providers: [
         ...[words, provideHttpClient(), provideHttpClientTesting(), { provide: SESSION_PORT, useValue: {} }],
@@ -82,7 +89,7 @@ export class BooksVisit {
       ],
     });
     signIn(at.roles ?? ['office']);
-    visit = new BooksVisit(await RouterTestingHarness.create(at.address));
+    const visit = new BooksVisit(await RouterTestingHarness.create(at.address), questions);
     await visit.settle();
     return visit;
   }
@@ -139,9 +146,14 @@ export class BooksVisit {
     return this.http.expectOne((one) => one.method === method && one.urlWithParams.split('?')[0] === address);
   }
 
-  async answer(method: string, address: string, body: unknown, status = 200): Promise<void> {
-    const options = status === 204 ? { status, statusText: 'No Content' } : { status, statusText: 'told' };
-    this.request(method, address).flush(body as object, options);
+  async answer(method: string, address: string, body: unknown): Promise<void> {
+    this.request(method, address).flush(body as object);
+    await this.settle();
+  }
+
+  /** The server says no to it. */
+  async refuse(method: string, address: string, problem: { readonly status: number }): Promise<void> {
+    this.request(method, address).flush(problem, { status: problem.status, statusText: 'refused' });
     await this.settle();
   }
 

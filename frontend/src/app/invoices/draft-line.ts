@@ -41,6 +41,11 @@ export class DraftLine {
   protected readonly path = computed(() => `lines.${this.place()}`);
   private readonly line = computed(() => this.form().value<InvoiceContent['lines'][number]>(this.path()));
   protected readonly name = computed(() => this.line()?.name || $localize`Line ${this.place() + 1}:place:`);
+  protected readonly deeds = computed(() => ({
+    up: $localize`Move up: ${this.name()}:line:`,
+    down: $localize`Move down: ${this.name()}:line:`,
+    remove: $localize`Remove: ${this.name()}:line:`,
+  }));
   protected readonly showsWords = computed(() => this.wantsWords() || Boolean(this.line()?.description));
   protected readonly showsAllowances = computed(
     () => this.wantsAllowance() || (this.line()?.allowancesCharges.length ?? 0) > 0,

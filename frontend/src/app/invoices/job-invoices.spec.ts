@@ -1,0 +1,95 @@
+import { ChangeDetectionStrategy, Component } from '@angular/core';
+import { TestBed } from '@angular/core/testing';
+import { Router } from '@angular/router';
+import type { ContractAccountAnswer } from '#shared/invoices/contract-account-endpoints';
+import { BooksVisit, invoiceId, pageOf, sampleDraft, sampleSummary } from '../../test/sample-invoices';
+import { JobInvoices } from './job-invoices';
+
+const job = {
+  ...{ id: invoiceId(30), version: 1, number: '2026-011', title: 'Pier table', clientId: invoiceId(90) },
+  ...{ clientName: 'Ashgrove House', kind: 'new', reference: '', site: '', note: '', state: 'accepted' },
+  changedAt: '2026-05-04T10:00:00.000Z',
+};
+
+const issueId = invoiceId(40);
+const work = { of: 'work', from_percent: '40', to_percent: '100' } as const;
+const contract: ContractAccountAnswer = {
+  ...{ currency: 'EUR', gross_minor: 1_230_00, invoiced_minor: 400_00, credited_minor: 50_00, left_minor: 880_00 },
+  parts: [
+    {
+      ...{ issueId, kind: 'estimate', number: '2026-011-1', title: 'Pier table', acceptedOn: '2026-05-04' },
+      ...{ net_minor: 1_000_00, gross_minor: 1_230_00, invoiced_minor: 400_00, credited_minor: 50_00 },
+      ...{ left_minor: 880_00, isComplete: false },
+      next: [
+        { claim: { of: 'deposit' }, name: '', plannedOn: null, net_minor: 300_00, gross_minor: 369_00 },
+        { claim: work, name: 'Delivered', plannedOn: '2026-07-01', net_minor: 415_45, gross_minor: 511_00 },
+      ],
+    },
+  ],
+};
+
+@Component({
+  selector: 'app-test-job',
+  imports: [JobInvoices],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `<app-job-invoices [job]="job" />`,
+})
+class TestJob {
+  protected readonly job = job as never;
+}
+
+describe('JobInvoices', () => {
+  const account = `/api/jobs/${job.id}/contract-account`;
+  const stage = `/api/jobs/${job.id}/stage-invoices`;
+  const begin = async (roles: NonNullable<Parameters<typeof BooksVisit.begin>[1]['roles']> = ['office']) => {
+    const visit = await BooksVisit.begin(TestJob, { path: 'job', address: '/job', roles });
+    await visit.answer('GET', account, { contract });
+    await visit.answer('GET', '/api/invoices', pageOf([sampleSummary({ state: 'draft', number: null })]));
+    return visit;
+  };
+
+  it('shows what of the contract is invoiced, credited and left, and what may come next with its day', async () => {
+    const visit = await begin();
+    for (const text of ['€1,230.00', '€400.00', '€50.00', '€880.00', 'Deposit', '€369.00', 'Delivered', '€511.00'])
+      expect(visit.text).toContain(text);
+    expect([...visit.element.querySelectorAll<HTMLInputElement>('input[type=date]')].map(({ value }) => value)).toEqual(
+      ['', '2026-07-01'],
+    );
+  });
+
+  it('drafts the invoice of a claim under the same id when it is pressed again, and says why it is refused', async () => {
+    const visit = await begin();
+    await visit.press('Draft the invoice, Deposit');
+    const first = visit.request('POST', stage);
+    expect(first.request.body).toMatchObject({ issueId, claim: { of: 'deposit' } });
+    const taken = { type: 'urn:problem:invoice-claim-taken', title: 'This is invoiced already, or not due yet.' };
+    first.flush({ ...taken, status: 409, instance: '', errors: [] }, { status: 409, statusText: 'Conflict' });
+    await visit.settle();
+    // What may come next is asked anew, since somebody else was faster.
+    await visit.answer('GET', account, { contract });
+    await visit.press('Draft the invoice, Deposit');
+    const second = visit.request('POST', stage);
+    expect(second.request.body).toEqual(first.request.body);
+    const { invoiceId: id } = second.request.body as { invoiceId: string };
+    second.flush(sampleDraft({ id }));
+    await visit.settle();
+    expect(TestBed.inject(Router).url).toBe(`/accounts/invoices/${id}`);
+  });
+
+  it('invoices the share that is done, from where the work nothing claims begins', async () => {
+    const visit = await begin();
+    await visit.press('Invoice by the share that is done');
+    await visit.type('So much of the work is done', '40');
+    expect(visit.button('Draft the invoice')?.disabled).toBe(true);
+    await visit.type('So much of the work is done', '62.5');
+    await visit.press('Draft the invoice');
+    const { claim } = visit.request('POST', stage).request.body as { claim: unknown };
+    expect(claim).toEqual({ of: 'work', from_percent: '40', to_percent: '62.5' });
+  });
+
+  it('lets the estimator plan and draft nothing', async () => {
+    const visit = await begin(['estimator']);
+    expect(visit.element.querySelectorAll('button')).toHaveLength(0);
+    expect(visit.element.querySelectorAll('input[type=date]')).toHaveLength(2);
+  });
+});
