@@ -1,13 +1,15 @@
 import { Injectable, inject } from '@angular/core';
 import type { BenchTask } from '#shared/programme/bench-task';
 import { Formats } from '../../core/formats/formats';
-import { Words } from '../../core/formats/words';
+import { NOW } from '../../core/now';
+import { TaskWords } from '../plan/task-words';
 
 /** What is said of a task at the bench; nothing of cost. */
 @Injectable({ providedIn: 'root' })
 export class BenchWords {
   private readonly formats = inject(Formats);
-  private readonly words = inject(Words);
+  private readonly now = inject(NOW);
+  private readonly tasks = inject(TaskWords);
 
   title({ kind, name, lot, coat, coats }: BenchTask): string {
     if (kind === 'carving') return $localize`Carve: ${lot}:member:`;
@@ -33,7 +35,7 @@ export class BenchWords {
   /** What it waits for, or until when it can be done. */
   state(task: BenchTask): string {
     if (task.state === 'finished') return $localize`finished`;
-    const waits = task.waits.map(({ code, values }) => this.words.say(code, values)).join(' ');
+    const waits = this.tasks.waits(task.waits).join(' ');
     if (task.state === 'drying' && task.readyAt) return $localize`drying, ready ${this.moment(task.readyAt)}:time:`;
     if (task.state === 'waiting') return waits;
     return task.windowClosesAt ? this.until(task.windowClosesAt) : '';
@@ -49,7 +51,7 @@ export class BenchWords {
 
   /** The time alone, with its day where that is another than today. */
   moment(at: string): string {
-    const [own, today] = [this.formats.dayOf(at), this.formats.dayOf(new Date())];
+    const [own, today] = [this.formats.dayOf(at), this.formats.dayOf(this.now())];
     return own === today ? this.time(at) : `${this.formats.dayOf(at, 'weekday')}, ${this.time(at)}`;
   }
 }

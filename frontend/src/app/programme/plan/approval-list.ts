@@ -17,6 +17,7 @@ import { ProgrammeStore } from './programme-store';
     <details [open]="approvals().length < 7">
       <summary>
         <h3 i18n>Approvals</h3>
+        &ngsp;
         <span class="muted" i18n>{{ waiting() }} waited for</span>
       </summary>
       <ul class="plain">
@@ -54,14 +55,12 @@ import { ProgrammeStore } from './programme-store';
     }
 
     summary {
-      display: flex;
-      gap: 10px;
-      align-items: baseline;
       min-height: 36px;
       cursor: pointer;
     }
 
     h3 {
+      display: inline;
       font-size: 1.125rem;
       line-height: 1.5rem;
     }

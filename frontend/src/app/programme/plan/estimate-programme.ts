@@ -79,7 +79,7 @@ export class EstimateProgramme {
   protected readonly helps = computed(() => this.planWords.helps());
   protected readonly isStale = computed(() => {
     const answer = this.store.answer();
-    return answer?.plan != null && !answer.isCurrent;
+    return answer !== undefined && answer.plan !== null && !answer.isCurrent;
   });
   protected readonly brokenFirst = computed(() => (this.store.answer()?.broken ?? []).slice(0, 5));
   /** What stands in the way of any plan. */

@@ -30,9 +30,12 @@ export class PlanWords {
   readonly hands = computed(() => {
     const answer = this.store.answer();
     if (!answer) return '';
-    const lots = new Set(answer.items.map(({ lotId }) => lotId)).size;
-    const people = answer.request.people.length;
-    return $localize`${this.count(lots)}:lots: lots, ${this.count(people)}:people: people`;
+    const carved = new Set(answer.items.filter(({ kind }) => kind === 'carving').map(({ lotId }) => lotId));
+    const lots = new Set(answer.items.map(({ lotId }) => lotId)).size - carved.size;
+    const [coated, members, people] = [lots, carved.size, answer.request.people.length].map((one) => this.count(one));
+    return carved.size > 0
+      ? $localize`${coated}:lots: lots, ${members}:members: carved members, ${people}:people: people`
+      : $localize`${coated}:lots: lots, ${people}:people: people`;
   });
   readonly chips = computed<readonly string[]>(() => [...this.startChips(), ...this.planChips()]);
   readonly idle = computed(() => {
@@ -40,7 +43,7 @@ export class PlanWords {
     if (!answer || !plan) return [];
     return idleReasons(plan, answer.items, mostIdle).map(({ item, waits }) => ({
       name: `${item.lot}, ${this.tasks.name(item)}:`,
-      text: waits.map(({ code, values }) => this.words.say(code, values)).join(' '),
+      text: this.tasks.waits(waits).join(' '),
     }));
   });
   readonly progress = computed(() => {

@@ -17,8 +17,12 @@ export interface ShownPlan {
   readonly mayMove: boolean;
 }
 
-/** A window is open from when a coat is dry until it closes. */
-function windowOf({ end_minutes, dryUntil_minutes, windowUntil_minutes }: PlannedTask): RibbonTask['window'] {
+/** A window is open from when a coat is dry until it closes; from coat to coat it is told and not outlined, since the next coat lies within. */
+function windowOf(
+  { coat, coats }: ProgrammeItem,
+  { end_minutes, dryUntil_minutes, windowUntil_minutes }: PlannedTask,
+): RibbonTask['window'] {
+  if (coat < coats) return null;
   const start_minutes = dryUntil_minutes ?? end_minutes;
   return windowUntil_minutes !== null && windowUntil_minutes > start_minutes
     ? { start_minutes, end_minutes: windowUntil_minutes }
@@ -37,7 +41,7 @@ function ribbonTask(item: ProgrammeItem, task: PlannedTask, shown: ShownPlan & {
   return {
     ...{ id: item.taskId, name: shown.words.name(item), label: shown.words.label(item) },
     ...{ start_minutes: task.start_minutes, end_minutes: task.end_minutes, spans: task.spans },
-    ...{ dryUntil_minutes: task.dryUntil_minutes, window: windowOf(task) },
+    ...{ dryUntil_minutes: task.dryUntil_minutes, window: windowOf(item, task) },
     ...{ look: state === 'finished' ? 'done' : 'planned', isPinned, isCritical: task.isCritical },
     isMovable: shown.mayMove && state === 'planned',
     story: shown.words.story({ ...shown, item, task, state, isPinned }),

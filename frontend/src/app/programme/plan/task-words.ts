@@ -1,7 +1,8 @@
 import { Injectable, inject } from '@angular/core';
-import { instantOf, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import { dayOfMinutes, instantOf, type ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { ProgrammeItem } from '#shared/programme/programme-item';
 import type { PlannedTask } from '#shared/programme/programme-plan';
+import type { Reason } from '#shared/words/reason';
 import { Formats } from '../../core/formats/formats';
 import { Words } from '../../core/formats/words';
 
@@ -64,12 +65,22 @@ export class TaskWords {
       ...(told.state === 'started' ? [$localize`In work.`] : []),
       ...(told.isPinned ? [$localize`Pinned to this time.`] : []),
       ...(told.state === 'planned' ? [this.slack(task)] : []),
-      ...task.waits.map(({ code, values }) => this.words.say(code, values)),
+      ...this.waits(task.waits),
     ];
   }
 
+  /** Why something does not start earlier, a sentence each. */
+  waits(reasons: readonly Reason[]): string[] {
+    return reasons.map(({ code, values }) => {
+      const day = values['day'];
+      return this.words.say(code, typeof day === 'string' ? { ...values, day: this.formats.day(day, 'full') } : values);
+    });
+  }
+
   private when({ item, task, people, frame }: ToldTask): string {
-    const [from, to] = [task.start_minutes, task.end_minutes].map((at) => this.moment(at, frame));
+    const from = this.moment(task.start_minutes, frame);
+    const isOneDay = dayOfMinutes(task.start_minutes, frame) === dayOfMinutes(task.end_minutes, frame);
+    const to = isOneDay ? this.formats.time(instantOf(task.end_minutes, frame)) : this.moment(task.end_minutes, frame);
     const who = task.personIds.map((id) => people.get(id) ?? item.grade).join(', ');
     const length = this.duration(item.handsOn_minutes);
     return who === ''

@@ -56,6 +56,8 @@ export class WhatIfComparison {
   private readonly done = signal<readonly ComparedWay[]>([]);
   private readonly underWay = signal<string | undefined>(undefined);
   private isStopped = false;
+  /** The plan of the first way: where it keeps the rules of another too, that one never ends later. */
+  private first: Programme | undefined;
 
   readonly ways = this.done.asReadonly();
   /** The name of the way that is being planned. */
@@ -64,6 +66,7 @@ export class WhatIfComparison {
   async compare(estimateId: string, inputs: ProgrammeInputs, ways: readonly AskedWay[]): Promise<void> {
     this.done.set([]);
     this.isStopped = false;
+    this.first = undefined;
     try {
       for (const way of ways) {
         this.underWay.set(way.name);
@@ -86,8 +89,10 @@ export class WhatIfComparison {
   private async worked(estimateId: string, { direction, day }: ProgrammeInputs, way: AskedWay): Promise<ComparedWay> {
     const answer = await this.client.whatIf(estimateId, way.whatIf);
     const until = minutesOfDay(addDays(way.whatIf.day ?? day, 1), frameOf(answer));
-    const search = direction === 'backward' ? { backwardFrom_minutes: until } : {};
+    const incumbent = this.first;
+    const search = direction === 'backward' ? { backwardFrom_minutes: until } : incumbent ? { incumbent } : {};
     const plan = await this.planner.plan({ request: answer.request, search, seconds });
+    this.first ??= plan;
     return compared(way.name, answer, plan);
   }
 }

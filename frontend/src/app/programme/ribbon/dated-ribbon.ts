@@ -2,7 +2,7 @@ import {
   ChangeDetectionStrategy,
   Component,
   DestroyRef,
-  ElementRef,
+  type ElementRef,
   Injector,
   afterNextRender,
   computed,
@@ -24,13 +24,14 @@ import { smallScreen } from '../../ui/screen/small-screen';
 import { closedStretches, ribbonMarks, type RibbonMark } from './ribbon-days';
 import { ribbonLayout } from './ribbon-layout';
 import type { RibbonLot, RibbonTask } from './ribbon-lot';
+import { ribbonRange } from './ribbon-range';
 import { pixelOf } from './ribbon-scale';
+import { storyPlace } from './story-place';
 import { taskAfter } from './ribbon-steps';
 import { RibbonView } from './ribbon-view';
-import { TaskDrag, type DraggedTask } from './task-drag';
+import { draggedBar, TaskDrag, type DraggedTask } from './task-drag';
 
 const day_minutes = 1440;
-const story_px = { width: 340, height: 210 };
 
 /** Lots down, time across: work solid, drying hatched, windows outlined, nights and closed days shaded. Only what is in view is drawn. */
 @Component({
@@ -69,13 +70,8 @@ export class DatedRibbon {
   ];
   protected readonly names_px = computed(() => (this.isSmall() ? 104 : 168));
   protected readonly told = signal<{ task: RibbonTask; x: number; y: number } | undefined>(undefined);
-  private readonly range = computed(() => {
-    const all = this.lots().flatMap(({ tasks }) => tasks);
-    const start = Math.min(...all.map((task) => task.start_minutes), this.now_minutes() ?? Infinity);
-    const end = Math.max(0, ...all.map((task) => Math.max(task.end_minutes, task.dryUntil_minutes ?? 0)));
-    const first = Number.isFinite(start) ? Math.floor(start / day_minutes) * day_minutes : 0;
-    return { first_minutes: first, last_minutes: Math.max(end, first) + day_minutes };
-  });
+  private readonly range = computed(() => ribbonRange(this.lots(), this.now_minutes()));
+  private readonly first = computed(() => this.range().first_minutes);
   protected readonly view = new RibbonView(this.range);
   protected readonly height = computed(() => this.lots().length * this.row_px);
   protected readonly rows = computed(() =>
@@ -96,7 +92,6 @@ export class DatedRibbon {
     const x = pixelOf(now, this.view.scale());
     return x >= 0 && x <= this.view.width() ? x : null;
   });
-  protected readonly isNowShown = computed(() => this.nowX() !== null);
   protected readonly lineOf = computed(() => `M0 0H${this.view.width()}`);
   private readonly asked = signal<string | undefined>(undefined);
   /** The task the Tab key leads to. */
@@ -107,11 +102,7 @@ export class DatedRibbon {
   });
   protected readonly ghost = computed(() => {
     const at = this.dragging.at();
-    const lot = this.lots().find(({ tasks }) => tasks.some(({ id }) => id === at?.taskId));
-    const task = lot?.tasks.find(({ id }) => id === at?.taskId);
-    if (!at || !lot || !task) return undefined;
-    const length_px = ((task.end_minutes - task.start_minutes) * this.view.hour_px()) / 60;
-    return { lotId: lot.id, x: pixelOf(at.start_minutes, this.view.scale()), width: Math.max(4, length_px) };
+    return at && draggedBar(this.lots(), at, this.view.scale());
   });
 
   constructor() {
@@ -131,7 +122,7 @@ export class DatedRibbon {
       measure();
       this.show(this.firstDays());
     });
-    effect(() => this.begin(this.range().first_minutes));
+    effect(() => this.begin(this.first()));
   }
 
   /** So many days fit into the width; without a number all of it. */
@@ -177,12 +168,15 @@ export class DatedRibbon {
   protected grip(event: PointerEvent, task: RibbonTask): void {
     if (!task.isMovable || event.button !== 0 || event.pointerType === 'touch') return;
     this.dragging.begin(task, event.clientX);
-    this.scroller().nativeElement.setPointerCapture?.(event.pointerId);
   }
 
   protected drag(event: PointerEvent): void {
     const at = this.dragging.move(event.clientX, this.view.hour_px());
-    if (at) this.dragged.emit(at);
+    if (!at) return;
+    // Only once it moves: a press that does not stays with the task, and chooses it.
+    this.scroller().nativeElement.setPointerCapture?.(event.pointerId);
+    this.told.set(undefined);
+    this.dragged.emit(at);
   }
 
   protected drop(): void {
@@ -207,14 +201,8 @@ export class DatedRibbon {
     this.tellAt(task, { x: left, y: bottom + 8 });
   }
 
-  /** Beside the task, and never beyond the edge of the window. */
-  private tellAt(task: RibbonTask, { x, y }: { x: number; y: number }): void {
-    const [right, below] = [innerWidth - story_px.width - 12, innerHeight - story_px.height];
-    this.told.set({
-      task,
-      x: Math.max(8, Math.min(x, right)),
-      y: y > below ? Math.max(8, y - story_px.height - 60) : y,
-    });
+  private tellAt(task: RibbonTask, at: { x: number; y: number }): void {
+    this.told.set({ task, ...storyPlace(at, { width: innerWidth, height: innerHeight }) });
   }
 
   /** Puts the keyboard at a task, and the task into view. */
@@ -227,7 +215,7 @@ export class DatedRibbon {
     if (y < top || y + this.row_px + this.head_px > top + height) element.scrollTop = y - height / 3;
     this.follow();
     this.asked.set(task.id);
-    const focus = () => element.querySelector<SVGElement>(`[data-task="${CSS.escape(task.id)}"]`)?.focus();
+    const focus = () => element.querySelector<SVGElement>('g.task[tabindex="0"]')?.focus();
     afterNextRender(focus, { injector: this.injector });
   }
 

@@ -1,5 +1,6 @@
 import { signal } from '@angular/core';
-import type { RibbonTask } from './ribbon-lot';
+import type { RibbonLot, RibbonTask } from './ribbon-lot';
+import { pixelOf, type RibbonScale } from './ribbon-scale';
 
 /** A task that is being moved, and to which minute. */
 export interface DraggedTask {
@@ -40,4 +41,13 @@ export class TaskDrag {
     this.dragged.set(undefined);
     return at;
   }
+}
+
+/** The bar of a task that is being moved, on its line; pixels. */
+export function draggedBar(lots: readonly RibbonLot[], { taskId, start_minutes }: DraggedTask, scale: RibbonScale) {
+  const lot = lots.find(({ tasks }) => tasks.some(({ id }) => id === taskId));
+  const task = lot?.tasks.find(({ id }) => id === taskId);
+  if (!lot || !task) return undefined;
+  const length_px = ((task.end_minutes - task.start_minutes) * scale.hour_px) / 60;
+  return { lotId: lot.id, x: pixelOf(start_minutes, scale), width: Math.max(4, length_px) };
 }

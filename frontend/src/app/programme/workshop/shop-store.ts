@@ -1,5 +1,4 @@
 import { Injectable, computed, inject, linkedSignal, resource, signal } from '@angular/core';
-import type { BodyOf } from '#shared/actor/endpoint';
 import { complaintsOf, readBy } from '#shared/problems/complaints-of';
 import { keepShop, readShop } from '#shared/programme/programme-endpoints';
 import { shopContentSchema, type ShopContent } from '#shared/programme/shop-schema';
@@ -64,7 +63,7 @@ export class ShopStore {
     if (!answer || !content || this.sending() || !readBy(shopContentSchema, content).success) return false;
     this.sending.set(true);
     try {
-      const kept = await this.api.call(keepShop, { body: content as BodyOf<typeof keepShop>, version: answer.version });
+      const kept = await this.api.call(keepShop, { body: content, version: answer.version });
       this.reading.set(kept);
       this.tried.set(false);
       return true;
