@@ -100,7 +100,7 @@ const doors = [
     to: {
       path: [
         '^backend/src/(app|main)\\.ts$',
-        '^frontend/src/(main|app/(app|app-routes|app-config))\\.ts$',
+        '^frontend/src/(main|client|app/(app|app-routes|app-config|client-config|client-bootstrap))\\.ts$',
         '^seeders/',
       ],
     },
@@ -147,7 +147,7 @@ const techniques = [
         schemaOrEndpoints,
         '^shared/problems/',
         '^backend/src/platform/(config|http)/',
-        '^frontend/src/(main\\.ts$|app/core/|app/.*-form\\.ts$)',
+        '^frontend/src/((main|client)\\.ts$|app/core/|app/.*-form\\.ts$)',
         spec,
         testSupport,
       ],

@@ -1,8 +1,9 @@
 import { spawn } from 'node:child_process';
 import { existsSync, rmSync } from 'node:fs';
 import { dirname, join } from 'node:path';
-import { fileURLToPath } from 'node:url';
+import { fileURLToPath, pathToFileURL } from 'node:url';
 import { buildServer } from './build-server.mjs';
+import { prepareFirstVisit } from './client-first-visit.mjs';
 import { isCurrent, stampOf, writeStamp } from './source-stamp.mjs';
 
 const root = join(dirname(fileURLToPath(import.meta.url)), '../..');
@@ -15,7 +16,7 @@ const parts = [
     stampFile: join(root, '.cache/built-pages.txt'),
     result: join(root, 'dist/web/index.html'),
     sources: inRoot('frontend', 'shared', 'fonts', 'angular.json', 'package-lock.json', 'tsconfig.json'),
-    build: () => run(process.execPath, [ng, 'build', '--progress=false']),
+    build: buildPages,
   },
   {
     name: 'the server',
@@ -25,6 +26,13 @@ const parts = [
     build: buildServer,
   },
 ];
+
+/** The workshop's pages, and then those of clients, which lie in a folder of theirs. */
+async function buildPages() {
+  await run(process.execPath, [ng, 'build', 'web', '--progress=false']);
+  await run(process.execPath, [ng, 'build', 'client', '--progress=false', '--stats-json']);
+  prepareFirstVisit(join(root, 'dist/web/client-files'));
+}
 
 function run(command, args) {
   return new Promise((resolve, reject) => {
@@ -50,9 +58,12 @@ export async function buildWhatChanged(say, { withPages }) {
 /** Builds the pages again at every change, for development: the next start builds its own. Answers how to end it. */
 export function watchPages() {
   rmSync(parts[0].stampFile, { force: true });
-  const child = spawn(process.execPath, [ng, 'build', '--watch', '--configuration', 'development'], {
+  const child = spawn(process.execPath, [ng, 'build', 'web', '--watch', '--configuration', 'development'], {
     cwd: root,
     stdio: ['ignore', 'inherit', 'inherit'],
   });
   return () => child.kill('SIGTERM');
 }
+
+if (import.meta.url === pathToFileURL(process.argv[1] ?? '').href)
+  await buildWhatChanged(console.log, { withPages: true });

@@ -26,6 +26,10 @@ function refuseStranger(response: ServerResponse): void {
   response.end(JSON.stringify({ type: 'about:blank', title: 'Signed out', status: 401, instance: '', errors: [] }));
 }
 
+/** Clients have an application of their own. */
+const pageOf = (folder: string, pathname: string): string =>
+  path.join(folder, /^\/client(\/|$)/.test(pathname) ? 'client-files/index.html' : 'index.html');
+
 /** Serves a folder as the server would to a stranger: every address that is no file is the page, every call is refused. */
 export async function servedFiles(folder: string): Promise<ServedFiles> {
   const asked = new Set<string>();
@@ -33,7 +37,7 @@ export async function servedFiles(folder: string): Promise<ServedFiles> {
     const { pathname } = new URL(request.url ?? '/', 'http://localhost');
     if (pathname.startsWith('/api/')) return refuseStranger(response);
     const exact = path.join(folder, path.posix.normalize(pathname));
-    const file = isFile(exact) ? exact : path.join(folder, 'index.html');
+    const file = isFile(exact) ? exact : pageOf(folder, pathname);
     asked.add(file);
     response.writeHead(200, { 'content-type': mediaTypes[path.extname(file)] ?? 'application/octet-stream' });
     response.end(readFileSync(file));

@@ -51,17 +51,17 @@ const member = (id: string, name: string): ClientIssue['pieces'][number]['member
 });
 
 export const clientPrice = (gross_minor: number, given: Partial<ClientPrice> = {}): ClientPrice => {
-  const tax_minor = Math.round((gross_minor * 23) / 123);
+  const tax_minor = 1_150_00;
   const net_minor = gross_minor - tax_minor;
-  const line = (id: string, memberId: string | null, kind: 'carving' | 'gilding', price_minor: number) => ({
+  const line = (id: string, memberId: string, [kind, price_minor]: readonly ['carving' | 'gilding', number]) => ({
     ...{ id, memberId, kind, price_minor, name: null, measured: null },
   });
   return {
     choice: [],
     lines: [
-      line('a', ids.base, 'carving', net_minor - 1_000_00),
-      line('b', ids.base, 'gilding', 600_00),
-      line('c', ids.legs, 'gilding', 400_00),
+      line('a', ids.base, ['carving', net_minor - 1_000_00]),
+      line('b', ids.base, ['gilding', 600_00]),
+      line('c', ids.legs, ['gilding', 400_00]),
     ],
     ...{ subtotal_minor: net_minor, discount_minor: 0, discount_percent: null, net_minor, tax_minor, gross_minor },
     taxes: [{ name: 'VAT', code: 'S', percent: '23', exemptionReason: '', net_minor, tax_minor }],

@@ -1,5 +1,5 @@
 import { randomBytes } from 'node:crypto';
-import { readFileSync } from 'node:fs';
+import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import express, { Router, type RequestHandler } from 'express';
 import { pagePolicy } from './headers';
@@ -7,12 +7,20 @@ import { pagePolicy } from './headers';
 const year_seconds = 31_536_000;
 const hashed = /[-.][A-Za-z0-9_-]{8,}\.(?:js|css|woff2|png|svg)$/;
 
+/** Clients have an application of their own, so that nothing of the workshop's travels with theirs. */
+function entryOf(folder: string, path: string): string {
+  const ofClients = join(folder, 'client-files/index.html');
+  return /^\/client(\/|$)/.test(path) && existsSync(ofClients) ? ofClients : join(folder, 'index.html');
+}
+
 /** The page itself, with a fresh nonce for its styles; never cached, since it names the files of one build. */
 function page(folder: string, isPage: (path: string) => boolean): RequestHandler {
-  let html: string | undefined;
+  const read = new Map<string, string>();
   return (request, response, next) => {
     if (request.method !== 'GET' || /\/\.|\.\w+$/.test(request.path)) return next();
-    html ??= readFileSync(join(folder, 'index.html'), 'utf8');
+    const file = entryOf(folder, request.path);
+    const html = read.get(file) ?? readFileSync(file, 'utf8');
+    read.set(file, html);
     const nonce = randomBytes(16).toString('base64');
     response.set('Content-Security-Policy', pagePolicy(nonce)).set('Cache-Control', 'no-store');
     response

@@ -71,7 +71,11 @@ describe('IssueSending', () => {
     });
     await widget.press('Copy it');
     expect(widget.button('Copied')).toBeUndefined();
-    expect(TestBed.inject(Notices).current().some(({ text }) => text.includes('by hand'))).toBe(true);
+    expect(
+      TestBed.inject(Notices)
+        .current()
+        .some(({ text }) => text.includes('by hand')),
+    ).toBe(true);
   });
 
   it('says beside the form why nothing could be sent', async () => {

@@ -1,0 +1,1 @@
+export { ClientSession } from './client-session';
