@@ -9,6 +9,7 @@ import { issueEstimate } from '#shared/estimates/issues-endpoints';
 import { draftCard } from '../api/sample-card';
 import { sampleEstimate, sampleMember, type SampleEstimate } from '../api/sample-estimate';
 import { linkTo, sampleIssue, type SampleIssue } from '../api/sample-client-visit';
+import { sampleDraft, sampleInvoice } from '../api/sample-invoice';
 import { sampleClient, sampleJob } from '../api/sample-job';
 import type { Parts } from '../api/visitor';
 import type { Person, Walk } from './walk';
@@ -23,10 +24,20 @@ export interface Stage {
   readonly issued: SampleEstimate & { readonly issueId: string };
   /** Two more that went to their clients, with the secrets of their links. */
   readonly sent: readonly (SampleIssue & { readonly token: string })[];
+  /** A draft and two papers that were issued, the last to the client of the last link, who has begun to pay it. */
+  readonly books: StageBooks;
   readonly jobClientId: string;
   readonly bareClientId: string;
   readonly bareJobId: string;
   readonly rateCardId: string;
+}
+
+interface StageBooks {
+  readonly draftId: string;
+  readonly issuedId: string;
+  readonly clientId: string;
+  readonly sentId: string;
+  readonly checkoutId: string;
 }
 
 /** A stage with somebody on it. */
@@ -67,6 +78,21 @@ async function sentIssue({ api }: Walk): Promise<SampleIssue & { token: string }
   return { ...issue, token: (await linkTo(api.ours, api, issue.issueId)).token };
 }
 
+async function booksOf({ api }: Walk, { jobId }: SampleIssue): Promise<StageBooks> {
+  const { ours, app, platform } = api;
+  const { clientId } = await app.jobs.job(ours.id, jobId);
+  const [draft, issued] = [await sampleDraft(ours), await sampleInvoice(ours)];
+  const sent = await sampleInvoice(ours, { clientId, jobId });
+  const payer = { accessId: newId(), name: 'Herons payer', email: '', returnUrl: () => 'http://127.0.0.1/' };
+  const checkout = await platform.database.transaction(() =>
+    app.invoices.checkouts.begin(ours.id, sent.invoiceId, payer),
+  );
+  return {
+    ...{ draftId: draft.invoiceId, issuedId: issued.invoiceId, clientId: issued.clientId },
+    ...{ sentId: sent.invoiceId, checkoutId: checkout.id },
+  };
+}
+
 export async function setStage(walk: Walk): Promise<Stage> {
   const { ours, app } = walk.api;
   const [sample, other] = [await sampleEstimate(ours), await sampleEstimate(ours)];
@@ -75,11 +101,13 @@ export async function setStage(walk: Walk): Promise<Stage> {
     body: { name: 'Herons guest', email: 'guest@herons.example', roles: ['bench'] },
     key: randomUUID(),
   });
+  const sent = [await sentIssue(walk), await sentIssue(walk)];
   return {
     walk,
     sample,
     furtherMemberIds,
-    sent: [await sentIssue(walk), await sentIssue(walk)],
+    sent,
+    books: await booksOf(walk, sent[1]),
     issued: { ...other, issueId: await issueOf(walk, other) },
     jobClientId: (await app.jobs.job(ours.id, sample.jobId)).clientId,
     bareClientId: await sampleClient(ours),
