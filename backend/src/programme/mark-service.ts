@@ -12,6 +12,7 @@ import type { Estimates } from '../estimates';
 import { ownPerson, type Bench, type BenchService } from './bench-service';
 import type { BenchParts } from './bench-service';
 import type { MarkRow } from './mark-model';
+import { refuseFarMark } from './planning-reach';
 import type { ProgrammeRepository } from './programme-repository';
 
 interface Parts extends BenchParts {
@@ -88,6 +89,7 @@ export class MarkService {
     const now = this.parts.clock.now();
     const at = entry.at === null ? now : new Date(entry.at);
     if (at > now) throw ofInstant('programme-mark-future');
+    refuseFarMark(at, { today: bench.today, timeZone: bench.frame.timeZone });
     const own = ownPerson(bench.shop, actor);
     const personIds = own && !planned.personIds.includes(own.id) ? [own.id] : planned.personIds;
     return { entry, item, at, personIds };

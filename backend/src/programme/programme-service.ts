@@ -17,6 +17,7 @@ import type { Jobs } from '../jobs';
 import type { Clock } from '../platform/clock/clock';
 import { refuseStale } from '../platform/database/keeping';
 import { type KeptPlan, packed, unpackedPlan } from './kept-plan';
+import { refuseFarInputs } from './planning-reach';
 import { firstDayOf, programmeIn, type ProgrammeContext, type ProgrammeContexts } from './programme-context';
 import type { ProgrammeRow } from './programme-model';
 import { holdOf, presentProgramme } from './programme-presenter';
@@ -57,6 +58,7 @@ export class ProgrammeService {
     if (row && isSame(row.inputs, inputs) && isRepeat(row, at.version)) return this.read(workshopId, at.id);
     if (row) refuseStale(row, at.version);
     const before = await contexts.of(workshopId, at.id);
+    refuseFarInputs(inputs, { today: before.today, timeZone: before.frame.timeZone });
     if (!row && at.version !== 0) throw new Rejection('not-found', 'problem-not-found');
     const known = { known: row?.firstDay ?? before.today, timeZone: before.frame.timeZone };
     const content = { inputs, firstDay: firstDayOf(inputs, before.marks, known), changedAt: clock.now() };

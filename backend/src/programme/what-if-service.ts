@@ -8,6 +8,7 @@ import type { WhatIfAnswer } from '#shared/programme/what-if-schema';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { Rejection } from '#shared/problems/rejection';
 import type { Estimates } from '../estimates';
+import { refuseFarInputs } from './planning-reach';
 import { programmeIn, type ProgrammeContexts } from './programme-context';
 import { presentFrame } from './programme-presenter';
 
@@ -62,6 +63,7 @@ export class WhatIfService {
   async ask(workshopId: string, estimateId: string, asked: WhatIf): Promise<WhatIfAnswer> {
     const standing = await this.parts.contexts.of(workshopId, estimateId);
     const inputs = inputsWith(standing.inputs, asked);
+    refuseFarInputs(inputs, { today: standing.today, timeZone: standing.frame.timeZone });
     const context = await this.parts.contexts.of(workshopId, estimateId, inputs);
     const { card, frame } = context;
     const draft = draftWith(context.draft, asked.lots, card);
