@@ -56,11 +56,15 @@ export const memberPages: Readonly<Record<string, AddressesOf>> = {
   ClientsPage: () => ['/clients'],
   NewClientPage: () => ['/clients/new'],
   ClientPage: ({ jobClientId }) => [`/clients/${jobClientId}`],
+  BoardPage: () => ['/programme'],
+  ShopPage: () => ['/programme/workshop'],
+  CalendarsPage: () => ['/programme/calendars'],
+  BenchPage: () => ['/bench'],
   WorkspacePage: (stage) => [estimate(stage)],
   MeasurePage: ofMembers('measure'),
   CarvePage: place('carve'),
   GildPage: ofMembers('gild'),
-  DryPage: place('dry'),
+  DryPage: (stage) => [...place('dry')(stage), ...place('dry?part=programme')(stage)],
   PricePage: (stage) =>
     ['', 'lines', 'profit', 'extras', 'stages', 'alternatives', 'card'].map(
       (part) => `${estimate(stage)}/price${part && `?part=${part}`}`,
