@@ -25,6 +25,7 @@ import { cardInForce, wholeCard } from '../api/sample-card';
 import { clientNamed, jobTitled } from '../api/sample-job';
 import type { Parts, Visitor } from '../api/visitor';
 import { foundingSettings } from '../api/test-workshop';
+import { PlantedBooks } from './planted-books';
 import { Planting } from './planting';
 import { done, type Stage } from './stage';
 
@@ -32,15 +33,21 @@ import { done, type Stage } from './stage';
 export class PlantedWorkshop {
   readonly planting = new Planting();
 
-  constructor(private readonly stage: Stage) {}
+  readonly books: PlantedBooks;
+
+  constructor(private readonly stage: Stage) {
+    this.books = new PlantedBooks(stage, this.planting);
+  }
 
   async plant(): Promise<void> {
     await this.plantPeople();
+    await this.books.plantLetters();
     await this.plantCard();
     await this.plantJobs();
     await this.plantDrafts();
     await this.plantIssues();
     await this.plantAgreements();
+    await this.books.plant();
   }
 
   private send(endpoint: Endpoint, parts: Parts) {

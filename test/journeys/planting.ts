@@ -79,29 +79,37 @@ export function freeTextsOf({ name, body }: Endpoint): string[] {
   return [...new Set(freeTexts(schema as JsonSchema, name))];
 }
 
+/** An entry, where it stands in a body, and which texts another rule lets in. */
+interface Sowing {
+  readonly field: string;
+  readonly paths: readonly Path[];
+  readonly fits: (text: string) => boolean;
+}
+
 /** Puts hostile texts into bodies, each with a number of its own so that it is known again where it turns up. */
 export class Planting {
   /** The text that went into each entry, by request and path. */
   readonly texts = new Map<string, string>();
 
-  /** The body with a hostile text in every entry that takes one; what prescribes its form stays as it is. */
-  into({ name, body: schema }: Endpoint, body: unknown): unknown {
+  /** The body with a hostile text in every entry that takes one and is not refused by another rule (`fits`); what prescribes its form stays as it is. */
+  into({ name, body: schema }: Endpoint, body: unknown, fits: (text: string) => boolean = () => true): unknown {
     const fields = new Map<string, Path[]>();
     for (const path of textsIn(body).filter((one) => !secret.test(String(one.at(-1))))) {
       const field = [name, ...path].map((part) => (typeof part === 'number' ? '*' : part)).join('.');
       const known = field.replace(/\.typed\..*$/, '.typed.*');
       fields.set(known, [...(fields.get(known) ?? []), path]);
     }
-    return [...fields].reduce((sown, [field, paths]) => this.sow(schema!, sown, { field, paths }), body);
+    return [...fields].reduce((sown, [field, paths]) => this.sow(schema!, sown, { field, paths, fits }), body);
   }
 
-  private sow(schema: z.ZodType, body: unknown, { field, paths }: { field: string; paths: Path[] }): unknown {
+  private sow(schema: z.ZodType, body: unknown, { field, paths, fits }: Sowing): unknown {
     const number = this.texts.size;
-    for (const text of [hostileTexts[number % hostileTexts.length] ?? '', shortText]) {
+    const inTurn = [...hostileTexts, ...hostileTexts].slice(number % hostileTexts.length).filter(fits);
+    for (const text of [...inTurn.slice(0, 1), shortText]) {
       const marked = `q${number} ${text}`;
       for (const where of [paths, paths.filter((path) => at(body, path) !== ''), paths.slice(0, 1)]) {
         const sown = withText(body, where, marked);
-        if (schema.safeParse(sown).success) {
+        if (where.length > 0 && schema.safeParse(sown).success) {
           this.texts.set(field, marked);
           return sown;
         }
