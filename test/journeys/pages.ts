@@ -50,6 +50,7 @@ export const memberPages: Readonly<Record<string, AddressesOf>> = {
   PeoplePage: () => ['/people'],
   WorkshopPage: () => ['/workshop'],
   ProfilePage: () => ['/profile'],
+  LettersPage: () => ['/letters', '/letters?kind=accepted'],
   JobsPage: () => ['/jobs'],
   NewJobPage: () => ['/jobs/new'],
   JobPage: ({ sample, sent }) => [sample, ...sent].map(({ jobId }) => `/jobs/${jobId}`),
