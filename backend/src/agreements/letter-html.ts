@@ -11,7 +11,9 @@ export function letterHtml(
   { name, addressLines, telephone }: Sender,
   letter: { subject: string; body: string },
 ): string {
-  const address = [name, ...addressLines, telephone].filter((line) => line.trim() !== '').map(escaped);
+  // Many an address begins with the name already.
+  const lines = new Set([name, ...addressLines, telephone].filter((line) => line.trim() !== ''));
+  const address = [...lines].map(escaped);
   return [
     `<!doctype html><html lang="en"><head><meta charset="utf-8"><title>${escaped(letter.subject)}</title></head>`,
     `<body style="margin:0;padding:24px;background:#fff"><div style="max-width:36em;${face}">`,
