@@ -143,6 +143,12 @@ export const openings: Readonly<Record<string, Opening>> = {
     const { jobId, estimateId, issueId } = scene.sent[0]!;
     await press(await to(scene, `/jobs/${jobId}/estimates/${estimateId}/issue/${issueId}`), 'Take it back');
   },
+  'agreements/letter-form.ts question': async (scene) =>
+    press(await to(scene, '/letters?kind=receipt'), 'Back to the first words'),
+  'programme/calendars/calendar-feeds.ts question': async (scene) =>
+    press(await to(scene, '/programme/calendars'), 'Take it back'),
+  'invoices/invoice-draft.ts question': async (scene) =>
+    press(await to(scene, `/accounts/invoices/${scene.books.draftId}`), 'Remove the draft'),
   'rate-cards/changes/put-in-force-form.ts question': async (scene) => {
     const page = await to(scene, `/rates/${scene.rateCardId}/changes`);
     const button = page.getByRole('button', { name: /^Put in force/ });

@@ -1,5 +1,5 @@
 import type { Period } from './invoice-calls';
-import { monthOf } from './period-of';
+import { monthOf } from './month-of';
 
 const isDay = (text: string | undefined): text is string => /^\d{4}-\d{2}-\d{2}$/.test(text ?? '');
 

@@ -11,7 +11,7 @@ import { EntryAt } from '../ui/field/entry-at';
 import { Icon } from '../ui/icon/icon';
 import { AllowanceRows } from './allowance-rows';
 import { isRated, taxCodeChoices, taxCodeNames } from './tax-code-names';
-import { unitChoices } from './unit-names';
+import { unitChoices } from './unit-choices';
 
 /** One line of a draft: what, how much of it, at which price, under which tax; its amount follows. */
 @Component({

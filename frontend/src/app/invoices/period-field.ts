@@ -2,7 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, input, output } from '@an
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
 import type { Period } from './invoice-calls';
-import { monthOf, quarterOf, yearOf } from './period-of';
+import { monthOf, quarterOf, yearOf } from './month-of';
 
 /** Which days: a usual period by one choice, or any two days. */
 @Component({

@@ -11,7 +11,7 @@ import { Skeleton } from '../ui/page/skeleton';
 import { InvoiceCalls, type Period } from './invoice-calls';
 import { ledgerEntryNames } from './invoice-names';
 import { PeriodField } from './period-field';
-import { yearOf } from './period-of';
+import { yearOf } from './month-of';
 import { workshopToday } from './workshop-today';
 
 /** The account of one client: what was owed before, every movement with what was owed after it, and the same as a paper. */

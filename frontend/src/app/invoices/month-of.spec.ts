@@ -1,4 +1,4 @@
-import { monthOf, quarterOf, yearOf } from './period-of';
+import { monthOf, quarterOf, yearOf } from './month-of';
 
 describe('The periods accounts are asked for', () => {
   it.each([
