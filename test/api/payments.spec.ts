@@ -14,7 +14,7 @@ import {
 } from '#shared/invoices/owed-endpoints';
 import { recordPayment, refundPayment, sharePayment, writeOff } from '#shared/invoices/payments-endpoints';
 import { ledgerFaults } from './ledger';
-import { creditDraft, issued, paymentOf, readBack, sampleDraft, sampleInvoice } from './sample-invoice';
+import { creditDraft, issued, paymentOf, readBack, sampleDraft, sampleInvoice, samplePayment } from './sample-invoice';
 import { startApi, type Api } from './start-api';
 
 let api: Api;
@@ -130,6 +130,22 @@ describe('what is given back', () => {
     await issued(api.ours, (await creditDraft(api.ours, sample.invoiceId)).id);
     expect(await readBack(api.ours, sample.invoiceId)).toMatchObject({ open_minor: 0, credited_minor: 12_000 });
     expect((await refund(id, 12_000)).status).toBe(200);
+  });
+
+  it('is refused under the id of another payment or refund, over another amount, and on a day to come', async () => {
+    const [one, other] = [await samplePayment(api.ours, api), await samplePayment(api.ours, api)];
+    const refundId = newId();
+    expect((await refund(one.id, 1_000, { refundId, reopens: true })).status).toBe(200);
+    for (const [paymentId, amount_minor, id] of [
+      [other.id, 1_000, refundId],
+      [other.id, 1_000, one.id],
+      [one.id, 5_000, refundId],
+    ] as const) {
+      const answer = await refund(paymentId, amount_minor, { refundId: id, reopens: true });
+      expect([answer.status, typeOf(answer)]).toEqual([409, 'urn:problem:refund-id-used']);
+    }
+    const late = await refund(other.id, 1_000, { reopens: true, refundedOn: '2999-01-01' });
+    expect([late.status, late.text.includes('lies ahead')]).toEqual([400, true]);
   });
 
   it('is one refund when it is asked for twice by the same id', async () => {
@@ -263,6 +279,8 @@ describe('what is owed', () => {
     for (const written of [mail.text, mail.html]) {
       expect(written).toContain('120.00');
       expect(written).toContain('For your books');
+      // What is open is said of today, not of a day to come.
+      expect(written).not.toContain('2099');
     }
     expect(mail.enclosures).toMatchObject([{ media: 'application/pdf' }]);
     expect(mail.enclosures[0].size_bytes).toBeGreaterThan(2_000);

@@ -1,6 +1,6 @@
 import type { Actor } from '#shared/actor/actor';
 import { Rejection } from '#shared/problems/rejection';
-import type { InvoiceParts } from './invoice-parts';
+import { todayIn, type InvoiceParts } from './invoice-parts';
 import type { LedgerPapers } from './ledger-papers';
 import type { Days, LedgerService } from './ledger-service';
 
@@ -21,11 +21,12 @@ export class StatementLetters {
     const { closing_minor, currency } = await this.parts.ledger.statement(workshopId, clientId, days);
     const paper = await this.parts.statements.statement(workshopId, clientId, days);
     const file = await this.parts.files.save(workshopId, paper);
+    const today = await todayIn(this.parts, workshopId);
     await this.parts.clientLetters.post(workshopId, {
       kind: 'statement',
       client,
       values: ({ money, day }) => ({
-        ...{ note, link: this.parts.clientEntrance, day: day(days.to) },
+        ...{ note, link: this.parts.clientEntrance, day: day(days.to < today ? days.to : today) },
         open: money(closing_minor, currency),
       }),
       enclosures: [{ fileId: file.id }],
