@@ -1,11 +1,13 @@
 import { randomUUID } from 'node:crypto';
 import { v7 as newId } from 'uuid';
 import type { Response } from 'supertest';
+import { keepLetterTemplate } from '#shared/agreements/letters-endpoints';
 import { invite } from '#shared/accounts/people-endpoints';
 import type { Endpoint } from '#shared/actor/endpoint';
 import type { Change } from '#shared/estimates/change-schema';
 import { changeEstimate } from '#shared/estimates/estimates-endpoints';
 import { issueEstimate } from '#shared/estimates/issues-endpoints';
+import { makeFeed } from '#shared/programme/board-endpoints';
 import { draftCard } from '../api/sample-card';
 import { sampleEstimate, sampleMember, type SampleEstimate } from '../api/sample-estimate';
 import { linkTo, sampleIssue, type SampleIssue } from '../api/sample-client-visit';
@@ -101,6 +103,9 @@ export async function setStage(walk: Walk): Promise<Stage> {
     body: { name: 'Herons guest', email: 'guest@herons.example', roles: ['bench'] },
     key: randomUUID(),
   });
+  const words = { kind: 'receipt', subject: 'Received', text: 'Thank you.' };
+  await done(walk, keepLetterTemplate, { version: 0, body: words });
+  await done(walk, makeFeed, { params: { feedId: newId() }, body: { name: 'The whole workshop', personId: null } });
   const sent = [await sentIssue(walk), await sentIssue(walk)];
   return {
     walk,
