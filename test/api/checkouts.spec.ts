@@ -144,6 +144,35 @@ describe('a payment by card', () => {
     expect(api.standIn.ledger.session(anew.sessionId)?.amount_total).toBe(7_000);
   });
 
+  it('begins anew where the service has ended its page, and is recorded where it was paid, though no event ever came', async () => {
+    const first = await begun();
+    api.standIn.ledger.expire(first.sessionId);
+    const anew = await begun(first);
+    expect(anew.sessionId).not.toBe(first.sessionId);
+    expect(api.standIn.ledger.session(anew.sessionId)?.status).toBe('open');
+    await api.standIn.pay(anew.sessionId, false);
+    const again = await begun(first);
+    expect([again.checkoutId, again.url]).toEqual([anew.checkoutId, '']);
+    expect(await openOf(first.invoiceId)).toBe(0);
+    expect(await paymentsOf(first.clientId)).toHaveLength(1);
+  });
+
+  it('that was given back by a server which stopped before it wrote that down is given back once', async () => {
+    const { clientId, invoiceId, sessionId } = await begun();
+    const { payment_intent: intentId } = await api.standIn.pay(sessionId);
+    const [payment] = await paymentsOf(clientId);
+    const refundId = newId();
+    // The service did it and told of it; our own answer was lost with the server that would have given it.
+    await api.platform.cards.refund({ intentId: intentId ?? '', amount_minor: 2_000, refundId });
+    await api.standIn.quiet();
+    const body = { refundId, amount_minor: 2_000, refundedOn: payment.receivedOn, reference: '', reopens: true };
+    const params = { paymentId: payment.id };
+    const again = await api.as('office').call(refundPayment, { params, body, key: randomUUID() });
+    expect([again.status, (again.body as Payment).amount_minor]).toEqual([200, -2_000]);
+    expect((await paymentsOf(clientId)).map(({ amount_minor }) => amount_minor)).toEqual([-2_000, 12_000]);
+    expect(await openOf(invoiceId)).toBe(2_000);
+  });
+
   it('is given back through the service, once however often it is asked', async () => {
     const { clientId, invoiceId, sessionId } = await begun();
     await api.standIn.pay(sessionId);

@@ -52,10 +52,11 @@ export class ClientInvoiceService implements ClientInvoices {
   }
 
   async begin(client: ClientActor, invoiceId: string): Promise<Checkout> {
-    const { openMinor } = await this.own(client, invoiceId);
+    await this.own(client, invoiceId);
     const { accessId, name, email } = client;
     const payer = { accessId, name, email, returnUrl: this.parts.returnUrl };
-    return presentCheckout(await this.parts.invoices.checkouts.begin(client.workshopId, invoiceId, payer), openMinor);
+    const checkout = await this.parts.invoices.checkouts.begin(client.workshopId, invoiceId, payer);
+    return presentCheckout(checkout, (await this.own(client, invoiceId)).openMinor);
   }
 
   async ask(client: ClientActor, checkoutId: string): Promise<Checkout> {

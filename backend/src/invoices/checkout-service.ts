@@ -52,7 +52,7 @@ export class CheckoutService {
     return this.parts.checkouts.get(workshopId, checkoutId);
   }
 
-  /** Begins a payment of what is open; one that was begun over the same amount goes on, one over another amount is ended. */
+  /** Begins a payment of what is open; one begun over the same amount goes on while its page stands, one over another amount is ended. */
   async begin(workshopId: string, invoiceId: string, payer: Payer): Promise<CheckoutRow> {
     await this.parts.settings.hold(workshopId);
     const invoice = await this.parts.invoices.get(workshopId, invoiceId);
@@ -61,17 +61,17 @@ export class CheckoutService {
     const { currency } = invoice;
     if (!isCharged(currency)) throw new Rejection('conflict', 'checkout-currency', { values: { currency } });
     for (const open of await this.parts.checkouts.openOf(workshopId, invoiceId)) {
-      if (open.amountMinor === invoice.openMinor && open.url !== null) return open;
-      await this.giveUp(open);
+      const known = await this.asked(open);
+      const goesOn = known.state === 'open' && known.url !== null && known.amountMinor === invoice.openMinor;
+      if (goesOn || known.state === 'paid') return known;
+      if (known.state === 'open') await this.giveUp(known);
     }
     return this.beginAnew(invoice, payer);
   }
 
   /** Asks the service where a payment stands and records what it says; the same way an event goes. */
   async ask(workshopId: string, checkoutId: string): Promise<CheckoutRow> {
-    const checkout = await this.parts.checkouts.get(workshopId, checkoutId);
-    if (checkout.sessionId !== null) await this.settle(checkout);
-    return this.parts.checkouts.get(workshopId, checkoutId);
+    return this.asked(await this.parts.checkouts.get(workshopId, checkoutId));
   }
 
   /** Takes a signed event once. What it tells is only where to look: the service itself says how things stand. */
@@ -89,6 +89,12 @@ export class CheckoutService {
   /** Events that spoke of no payment known to any workshop, the newest first. */
   unknownEvents(): Promise<UnknownPaymentEvent[]> {
     return this.parts.checkouts.unknownEvents();
+  }
+
+  /** Events get lost, and the service ends what nobody pays within a day. */
+  private async asked(checkout: CheckoutRow): Promise<CheckoutRow> {
+    if (checkout.sessionId !== null) await this.settle(checkout);
+    return this.parts.checkouts.get(checkout.workshopId, checkout.id);
   }
 
   private believed(signed: SignedBody): CardEvent {

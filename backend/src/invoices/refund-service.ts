@@ -6,7 +6,7 @@ import { Rejection } from '#shared/problems/rejection';
 import type { Doer } from '../audit';
 import type { CardPayments } from '../platform/card-payments/card-payments';
 import type { CheckoutRepository } from './checkout-repository';
-import type { InvoiceParts } from './invoice-parts';
+import { todayIn, type InvoiceParts } from './invoice-parts';
 import type { PaymentRow } from './payment-model';
 import type { PaymentService } from './payment-service';
 import type { SettlingService } from './settling-service';
@@ -18,6 +18,11 @@ interface Parts extends InvoiceParts {
   readonly checkouts: CheckoutRepository;
 }
 
+const lateDay = (): Rejection =>
+  new Rejection('invalid', 'problem-invalid', {
+    complaints: [{ path: ['refundedOn'], code: 'refund-late-day', values: {} }],
+  });
+
 /** Money given back: out of what lies to the client's credit, and beyond that out of what invoices hold, which are open again then. */
 export class RefundService {
   constructor(private readonly parts: Parts) {}
@@ -27,9 +32,13 @@ export class RefundService {
     await this.parts.settings.hold(workshopId);
     const payment = await this.parts.payments.lock(workshopId, paymentId);
     const known = await this.parts.payments.find(workshopId, entry.refundId);
-    if (known) return known;
+    if (known) return this.sameAs(known, payment, entry);
     await this.mustBeLeft(payment, entry);
+    if (entry.refundedOn > (await todayIn(this.parts, workshopId))) throw lateDay();
     const externalId = payment.way === 'card' ? await this.throughService(payment, entry) : null;
+    // Given back before, by a server that stopped before it wrote this down: the service has told of it meanwhile.
+    const told = externalId === null ? undefined : await this.parts.payments.byExternal(workshopId, externalId);
+    if (told) return told;
     return this.write(actor, payment, { ...entry, externalId, id: entry.refundId });
   }
 
@@ -68,6 +77,13 @@ export class RefundService {
       values: { amount_minor, client: client.name },
     });
     return row;
+  }
+
+  /** Entered before: what is asked again has to be the same, or somebody would believe that money went back. */
+  private sameAs(known: PaymentRow, payment: PaymentRow, { amount_minor }: RefundEntry): PaymentRow {
+    if (known.refundsPaymentId !== payment.id || known.amountMinor !== -amount_minor)
+      throw new Rejection('conflict', 'refund-id-used');
+    return known;
   }
 
   private async mustBeLeft(payment: PaymentRow, { amount_minor, reopens }: RefundEntry): Promise<void> {

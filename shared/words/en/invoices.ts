@@ -56,6 +56,9 @@ export const invoices = {
   'payment-no-credit': 'Of this payment {credit_minor} is left to the client’s credit.',
   'refund-over': 'Of this payment {left_minor} can be given back.',
   'refund-reopens': 'Giving this back leaves invoices open again. Please confirm that it is meant.',
+  'refund-late-day': 'The day lies ahead. Enter a refund once the money has gone back.',
+  'refund-id-used':
+    'This refund was entered already, of another payment or over another amount. Nothing was given back now.',
   'refund-of-refund': 'A refund cannot be refunded.',
   'refund-unreachable': 'The payment service did not take the refund. Nothing was changed; please try again.',
   'write-off-over': 'Only {open_minor} is open.',
