@@ -140,7 +140,7 @@ export const openings: Readonly<Record<string, Opening>> = {
     await press(page, 'Mark it');
   },
   'agreements/issue-sending.ts question': async (scene) => {
-    const { jobId, estimateId, issueId } = scene.sent[0]!;
+    const { jobId, estimateId, issueId } = scene.sent[0];
     await press(await to(scene, `/jobs/${jobId}/estimates/${estimateId}/issue/${issueId}`), 'Take it back');
   },
   'agreements/letter-form.ts question': async (scene) =>
