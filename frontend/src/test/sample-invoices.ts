@@ -23,7 +23,7 @@ export const sampleSummary = (more: Partial<InvoiceSummary> = {}): InvoiceSummar
 });
 
 const tax = { code: 'S', percent: '23' } as const;
-const line = { description: '', baseQuantity: '1', allowancesCharges: [], tax } as const;
+const line = { description: '', baseQuantity: '1', allowancesCharges: [], tax };
 
 export const sampleInvoice = (more: Partial<Invoice> = {}): Invoice => ({
   ...sampleSummary(),
@@ -152,7 +152,11 @@ export class BooksVisit {
   }
 
   /** The server says no to it. */
-  async refuse(method: string, address: string, problem: { readonly status: number }): Promise<void> {
+  async refuse(
+    method: string,
+    address: string,
+    problem: object & { readonly status: number; readonly current?: unknown },
+  ): Promise<void> {
     this.request(method, address).flush(problem, { status: problem.status, statusText: 'refused' });
     await this.settle();
   }
