@@ -35,8 +35,7 @@ import { ProgrammeStore } from './programme-store';
                   #given
                   class="entry dense"
                   type="date"
-                  i18n-aria-label
-                  aria-label="Approved on {{ one.title }}"
+                  [attr.aria-label]="one.label"
                   [max]="today"
                   [value]="today"
                 />
@@ -104,7 +103,12 @@ export class ApprovalList {
       const givenAt = all.every((one) => one.givenAt !== null) ? all[0].givenAt : null;
       const days = this.formats.figure('days', Math.max(...all.map((one) => one.usual_days)));
       return {
-        ...{ title, givenAt, ids: all.map(({ approvalId }) => approvalId) },
+        ...{
+          title,
+          givenAt,
+          label: $localize`${title}:approval:: on which day`,
+          ids: all.map(({ approvalId }) => approvalId),
+        },
         state: givenAt
           ? $localize`approved on ${this.formats.dayOf(givenAt)}:day:`
           : $localize`waited for, usually ${days}:days:`,

@@ -12,6 +12,9 @@ class StillObserver {
   observe(): void {
     return;
   }
+  unobserve(): void {
+    return;
+  }
   disconnect(): void {
     return;
   }
