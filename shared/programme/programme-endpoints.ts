@@ -74,6 +74,7 @@ export const solveProgramme = endpoint({
   callers: ['owner', 'estimator'],
   params: oneEstimate,
   body: solutionRequestSchema,
+  atOnce: 1,
   answers: { cost: solutionSchema },
 });
 

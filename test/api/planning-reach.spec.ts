@@ -1,5 +1,12 @@
 import { markTask } from '#shared/programme/board-endpoints';
-import { keepProgramme, readProgramme, readWhatIf } from '#shared/programme/programme-endpoints';
+import {
+  keepProgramme,
+  readProgramme,
+  readWhatIf,
+  solveProgramme,
+  stopSolution,
+} from '#shared/programme/programme-endpoints';
+import { sampleEstimate } from './sample-estimate';
 import { acceptedSample, plannedSample, programmeOf } from './sample-programme';
 import { startApi, type Api } from './start-api';
 
@@ -48,4 +55,20 @@ test('a pin or an approval as far away is refused beside its entry', async () =>
   expect(response.status).toBe(400);
   expect(JSON.stringify(complained(response))).toContain('approvals');
   expect(JSON.stringify(complained(response))).toContain('pins');
+});
+
+test('of one workshop three programmes are planned at once, however many are asked for', async () => {
+  const { estimateId } = await plannedSample(api.ours, api.ours.people.bench);
+  const more = await Promise.all(Array.from({ length: 5 }, () => sampleEstimate(api.ours)));
+  const body = { seconds: 60, keepsPlan: false };
+  const asked = [estimateId, ...more.map((sample) => sample.estimateId)];
+  const answers = await Promise.all(
+    asked.map((id) => api.as('owner').call(solveProgramme, { params: { estimateId: id }, body })),
+  );
+  expect(answers.map(({ status }) => status).toSorted()).toEqual([200, 200, 200, 429, 429, 429]);
+  const begun = answers.filter(({ status }) => status === 200).map((answer) => (answer.body as { id: string }).id);
+  for (const solutionId of begun) await api.as('owner').call(stopSolution, { params: { solutionId } });
+  await api.platform.tasks.runDue();
+  const again = await api.as('owner').call(solveProgramme, { params: { estimateId: asked.at(-1) ?? '' }, body });
+  expect(again.status).toBe(200);
 });

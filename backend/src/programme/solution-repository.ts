@@ -19,6 +19,12 @@ export class SolutionRepository extends WorkshopRows<SolutionRow> {
     return row;
   }
 
+  /** How many of a workshop are waiting or being worked out. */
+  async runningOf(workshopId: string): Promise<number> {
+    const where = { state: { [Op.in]: ['waiting', 'working'] as const } };
+    return (await this.list(workshopId, { where, limit: 100 })).length;
+  }
+
   /** Only the newest of a programme is kept: what is left of older ones is in the plan, if it was any good. */
   async forgetEnded(workshopId: string, programmeId: string): Promise<void> {
     await this.table.destroy({ where: { workshopId, programmeId, state: { [Op.notIn]: ['waiting', 'working'] } } });

@@ -5,6 +5,7 @@ import { minutesBetween, minutesOfDay, programmeFrame } from '#shared/programme/
 import type { EstimateProgramme } from '#shared/programme/programme-of-estimate';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeSearch } from '#shared/programme/programme-request';
+import { Rejection } from '#shared/problems/rejection';
 import { shiftedPlan } from '#shared/programme/shifted-plan';
 import type { SolutionAnswer } from '#shared/programme/solution-schema';
 import type { Clock } from '../platform/clock/clock';
@@ -27,6 +28,10 @@ interface Parts {
 }
 
 const taskKind = 'programme';
+/** Of one workshop: while it is planned all other tasks of the process wait, letters of every workshop among them. */
+const mostRunning = 3;
+const enough = (): Rejection => new Rejection('too-many', 'programme-planning-enough', { retryAfter_seconds: 60 });
+
 /** How often it is looked whether somebody wants it stopped, and the best plan so far is written down. */
 const look_milliseconds = 300;
 
@@ -78,6 +83,7 @@ export class SolutionService {
     const { version } = await programmes.lock(workshopId, estimateId);
     const running = await solutions.running(workshopId, estimateId);
     if (running) return presentSolution(running);
+    if ((await solutions.runningOf(workshopId)) >= mostRunning) throw enough();
     const context = await contexts.of(workshopId, estimateId);
     refuseWhereStopped(programmeIn(context, 'today'));
     await solutions.forgetEnded(workshopId, estimateId);

@@ -29,6 +29,8 @@ export const programmeBoard = {
     'The plan holds {tasks, plural, one {a task} other {# tasks}} that are not in the programme any more.',
   'programme-hold-not-sent': 'A slot is held for an issue that was sent. Mark the issue as sent first.',
   'programme-hold-over': 'The validity of issue {letter} ended on {until}: there is nothing to hold a slot for.',
+  'programme-planning-enough':
+    'Three programmes of the workshop are being planned already. Please ask again once one of them is done.',
   'programme-day-far': 'Planning reaches five years back and six ahead. Please name a nearer day.',
   'programme-mark-future': 'This lies in the future.',
   'programme-mark-before-start': 'It cannot end before it was started.',
