@@ -137,7 +137,7 @@ const page = {
 
 const templates = {
   files: ['frontend/**/*.html'],
-  ignores: ['frontend/src/index.html'],
+  ignores: ['frontend/src/index.html', 'frontend/src/client.html'],
   plugins: { local },
   extends: [...angular.configs.templateRecommended, ...angular.configs.templateAccessibility],
   rules: {

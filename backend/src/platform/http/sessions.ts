@@ -114,7 +114,7 @@ export class Sessions {
     Object.assign(request.session, { visit, ...(passport?.user ? { passport, forgeryToken, handle } : {}) });
     beginSession(request);
     await new Promise<void>((resolve, reject) => {
-      request.session.save((error: unknown) => (error ? reject(error as Error) : resolve()));
+      request.session.save((error: Error | undefined) => (error ? reject(error) : resolve()));
     });
   }
 
