@@ -1,6 +1,6 @@
 import * as z from 'zod';
 import { endpoint, sameForAll, sameForPriced } from '#shared/actor/endpoint';
-import { day, identifier } from '#shared/problems/entry-schema';
+import { identifier } from '#shared/problems/entry-schema';
 import { benchDaySchema, benchTaskSchema, markSchema } from '#shared/programme/bench-day-schema';
 import { boardSchema } from '#shared/programme/board-schema';
 import {
@@ -9,6 +9,7 @@ import {
   calendarFeedSchema,
   newCalendarFeedSchema,
 } from '#shared/programme/calendar-feed-schema';
+import { calendarDay } from '#shared/programme/shop-schema';
 
 const oneFeed = z.strictObject({ feedId: identifier });
 
@@ -19,7 +20,7 @@ export const readBoard = endpoint({
   method: 'get',
   path: '/api/programme/board',
   callers: ['owner', 'estimator', 'office'],
-  query: z.strictObject({ from: day.optional(), weeks: z.coerce.number().int().min(1).max(104).default(13) }),
+  query: z.strictObject({ from: calendarDay.optional(), weeks: z.coerce.number().int().min(1).max(104).default(13) }),
   answers: sameForPriced(boardSchema),
 });
 
@@ -29,7 +30,7 @@ export const readBenchDay = endpoint({
   method: 'get',
   path: '/api/programme/bench-day',
   callers: ['owner', 'estimator', 'office', 'bench'],
-  query: z.strictObject({ day: day.optional(), personId: identifier.optional() }),
+  query: z.strictObject({ day: calendarDay.optional(), personId: identifier.optional() }),
   answers: sameForAll(benchDaySchema),
 });
 

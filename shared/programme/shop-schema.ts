@@ -1,10 +1,19 @@
 import * as z from 'zod';
+import { daysBetween } from '#shared/calendar/add-days';
 import { climateSchema } from '#shared/drying/drying-card-schema';
 import { cardItemId, complainAt, itemList } from '#shared/problems/card-entry-schema';
 import { complain } from '#shared/problems/complaints-of';
 import { day, identifier, line, optionalLine } from '#shared/problems/entry-schema';
 import type { Shop } from '#shared/programme/shop';
 import type { MomentSpan } from '#shared/programme/shop-calendar';
+
+/** A day a calendar can be laid out to. */
+export const calendarDay = day.refine(
+  (text) => text >= '1971-01-01' && text <= '2199-12-31',
+  complain('programme-day-outside'),
+);
+
+const longestStretch_days = 366;
 
 const minuteOfDay = z.int().min(0).max(1440);
 
@@ -33,12 +42,22 @@ function daysInOrder(
   if (lastDay < firstDay) complainAt(context, ['lastDay'], complain('shop-days-end-before-start'));
 }
 
+/** Each of its days is laid out by itself. */
+function isNotTooLong(
+  { firstDay, lastDay }: { readonly firstDay: string; readonly lastDay: string },
+  context: z.core.$RefinementCtx,
+): void {
+  if (daysBetween(firstDay, lastDay) >= longestStretch_days)
+    complainAt(context, ['lastDay'], complain('shop-days-too-long'));
+}
+
 const shopDaysSchema = z
-  .strictObject({ id: identifier, name: line(80), firstDay: day, lastDay: day, hours: dayHoursSchema })
-  .superRefine(daysInOrder);
+  .strictObject({ id: identifier, name: line(80), firstDay: calendarDay, lastDay: calendarDay, hours: dayHoursSchema })
+  .superRefine(daysInOrder)
+  .superRefine(isNotTooLong);
 
 const absenceSchema = z
-  .strictObject({ id: identifier, firstDay: day, lastDay: day, note: optionalLine(120) })
+  .strictObject({ id: identifier, firstDay: calendarDay, lastDay: calendarDay, note: optionalLine(120) })
   .superRefine(daysInOrder);
 
 const placeSchema = z.strictObject({

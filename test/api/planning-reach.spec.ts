@@ -1,13 +1,16 @@
-import { markTask } from '#shared/programme/board-endpoints';
+import { v7 as newId } from 'uuid';
+import { markTask, readBenchDay, readBoard } from '#shared/programme/board-endpoints';
 import {
   keepProgramme,
+  keepShop,
+  readShop,
   readProgramme,
   readWhatIf,
   solveProgramme,
   stopSolution,
 } from '#shared/programme/programme-endpoints';
 import { sampleEstimate } from './sample-estimate';
-import { acceptedSample, plannedSample, programmeOf } from './sample-programme';
+import { acceptedSample, plannedSample, programmeOf, shopOf } from './sample-programme';
 import { startApi, type Api } from './start-api';
 
 /** Calendars are laid out day by day: a day centuries away, from whomever it comes, must not occupy the server. */
@@ -55,6 +58,21 @@ test('a pin or an approval as far away is refused beside its entry', async () =>
   expect(response.status).toBe(400);
   expect(JSON.stringify(complained(response))).toContain('approvals');
   expect(JSON.stringify(complained(response))).toContain('pins');
+});
+
+test('days no calendar has are refused in what is read and in the hours of the workshop', async () => {
+  const owner = api.as('owner');
+  expect((await owner.call(readBoard, { query: { from: '9999-12-31', weeks: 104 } })).status).toBe(400);
+  expect((await owner.call(readBenchDay, { query: { day: '9999-12-31' } })).status).toBe(400);
+  const { version } = (await owner.call(readShop)).body as { version: number };
+  for (const [firstDay, lastDay, says] of [
+    ['0001-01-01', '9999-12-31', '2199'],
+    ['2026-01-01', '2027-01-02', 'more than a year'],
+  ]) {
+    const days = [{ id: newId(), name: 'Closed', firstDay, lastDay, hours: [] }];
+    const response = await owner.call(keepShop, { version, body: shopOf('Herons', null, { days }) });
+    expect([response.status, response.text]).toEqual([400, expect.stringContaining(says)]);
+  }
 });
 
 test('of one workshop three programmes are planned at once, however many are asked for', async () => {

@@ -31,6 +31,8 @@ export const programmeBoard = {
   'programme-hold-over': 'The validity of issue {letter} ended on {until}: there is nothing to hold a slot for.',
   'programme-planning-enough':
     'Three programmes of the workshop are being planned already. Please ask again once one of them is done.',
+  'programme-day-outside': 'Choose a day between 1971 and 2199.',
+  'shop-days-too-long': 'This is more than a year. Change the usual hours instead, or enter it year by year.',
   'programme-day-far': 'Planning reaches five years back and six ahead. Please name a nearer day.',
   'programme-mark-future': 'This lies in the future.',
   'programme-mark-before-start': 'It cannot end before it was started.',
