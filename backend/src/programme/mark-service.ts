@@ -12,7 +12,7 @@ import type { Estimates } from '../estimates';
 import { ownPerson, type Bench, type BenchService } from './bench-service';
 import type { BenchParts } from './bench-service';
 import type { MarkRow } from './mark-model';
-import { refuseFarMark } from './planning-reach';
+import { refuseFarMark } from './refuse-far-inputs';
 import type { ProgrammeRepository } from './programme-repository';
 
 interface Parts extends BenchParts {

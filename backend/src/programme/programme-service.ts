@@ -17,7 +17,7 @@ import type { Jobs } from '../jobs';
 import type { Clock } from '../platform/clock/clock';
 import { refuseStale } from '../platform/database/keeping';
 import { type KeptPlan, packed, unpackedPlan } from './kept-plan';
-import { refuseFarInputs } from './planning-reach';
+import { refuseFarInputs } from './refuse-far-inputs';
 import { firstDayOf, programmeIn, type ProgrammeContext, type ProgrammeContexts } from './programme-context';
 import type { ProgrammeRow } from './programme-model';
 import { holdOf, presentProgramme } from './programme-presenter';

@@ -8,7 +8,7 @@ import type { WhatIfAnswer } from '#shared/programme/what-if-schema';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { Rejection } from '#shared/problems/rejection';
 import type { Estimates } from '../estimates';
-import { refuseFarInputs } from './planning-reach';
+import { refuseFarInputs } from './refuse-far-inputs';
 import { programmeIn, type ProgrammeContexts } from './programme-context';
 import { presentFrame } from './programme-presenter';
 

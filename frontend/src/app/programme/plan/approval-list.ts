@@ -5,7 +5,7 @@ import { groupedBy } from '#shared/units/grouped-by';
 import { Formats } from '../../core/formats/formats';
 import { NOW } from '../../core/now';
 import { holdNames } from '../../drying';
-import { morningOf } from './clock-time';
+import { morningOf } from './minutes-of-clock';
 import { ProgrammeStore } from './programme-store';
 
 /** What waits for somebody's approval, and when it was given. */

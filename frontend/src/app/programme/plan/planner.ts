@@ -2,7 +2,7 @@ import { DestroyRef, Injectable, inject, signal } from '@angular/core';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { Remedy } from '#shared/programme/programme-remedies';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
-import type { PlanningAnswer, PlanningQuestion } from './planning-worker';
+import type { PlanningAnswer, PlanningQuestion } from '#shared/programme/planning-question';
 import { PLANNING_STARTER } from './planning-starter';
 
 /** Somebody stopped before there was any plan. */

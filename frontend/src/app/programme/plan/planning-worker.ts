@@ -1,18 +1,6 @@
 import { programme } from '#shared/programme/programme';
-import type { Programme } from '#shared/programme/programme-plan';
-import { programmeRemedies, type Remedy } from '#shared/programme/programme-remedies';
-import type { ProgrammeRequest, ProgrammeSearch } from '#shared/programme/programme-request';
-
-/** What is planned, and for how long a better plan is looked for; `helpsTask`: what would help this task is tried instead. */
-export interface PlanningQuestion {
-  readonly request: ProgrammeRequest;
-  readonly search: Omit<ProgrammeSearch, 'limit' | 'onBetter'>;
-  readonly seconds: number;
-  readonly helpsTask?: string;
-}
-
-export type PlanningAnswer =
-  { readonly better: Programme } | { readonly plan: Programme } | { readonly remedies: readonly Remedy[] };
+import { programmeRemedies } from '#shared/programme/programme-remedies';
+import type { PlanningAnswer, PlanningQuestion } from '#shared/programme/planning-question';
 
 const tell = (answer: PlanningAnswer): void => postMessage(answer);
 

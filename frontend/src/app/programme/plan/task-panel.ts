@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import type { RibbonTask } from '../ribbon/ribbon-lot';
-import { clockOfMinutes, minutesOfClock } from './clock-time';
+import { clockOfMinutes, minutesOfClock } from './minutes-of-clock';
 import { ProgrammeStore } from './programme-store';
 
 /** The chosen task: its whole story, and its time to be typed, pinned and set free. */

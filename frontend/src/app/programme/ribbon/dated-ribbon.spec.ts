@@ -4,7 +4,7 @@ import { provideRouter } from '@angular/router';
 import { programmeFrame } from '#shared/programme/programme-frame';
 import { signIn, words } from '../../../test/sign-in';
 import { DatedRibbon } from './dated-ribbon';
-import { manyLots, ribbonLot, ribbonTask } from './ribbon-for-specs';
+import { ribbonForSpecs, ribbonLot, ribbonTask } from './ribbon-for-specs';
 import type { RibbonLot } from './ribbon-lot';
 import type { DraggedTask } from './task-drag';
 
@@ -68,7 +68,7 @@ describe('DatedRibbon', () => {
   });
 
   it('draws a part of sixty lots of forty steps', async () => {
-    await open(manyLots(60, 40));
+    await open(ribbonForSpecs(60, 40));
     expect(tasks().length).toBeGreaterThan(0);
     expect(tasks().length).toBeLessThan(600);
   });

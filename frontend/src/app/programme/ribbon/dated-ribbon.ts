@@ -21,13 +21,13 @@ import type { ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { MomentSpan } from '#shared/programme/shop-calendar';
 import { Formats } from '../../core/formats/formats';
 import { smallScreen } from '../../ui/screen/small-screen';
-import { closedStretches, ribbonMarks, type RibbonMark } from './ribbon-days';
+import { closedStretches, ribbonMarks, type RibbonMark } from './ribbon-marks';
 import { ribbonLayout } from './ribbon-layout';
 import type { RibbonLot, RibbonTask } from './ribbon-lot';
 import { ribbonRange } from './ribbon-range';
 import { pixelOf } from './ribbon-scale';
 import { storyPlace } from './story-place';
-import { taskAfter } from './ribbon-steps';
+import { taskAfter } from './task-after';
 import { RibbonView } from './ribbon-view';
 import { draggedBar, TaskDrag, type DraggedTask } from './task-drag';
 
@@ -40,7 +40,7 @@ const day_minutes = 1440;
   changeDetection: ChangeDetectionStrategy.OnPush,
   host: { '(document:keydown.escape)': 'giveUp()' },
   templateUrl: './dated-ribbon.html',
-  styleUrl: './dated-ribbon.scss',
+  styleUrls: ['./dated-ribbon.scss', './dated-ribbon-drawing.scss'],
 })
 export class DatedRibbon {
   private readonly formats = inject(Formats);

@@ -16,7 +16,7 @@ export const ribbonLot = (id: string, tasks: readonly RibbonTask[]): RibbonLot =
 });
 
 /** As many lots with as many steps, an hour of work each and five between. */
-export const manyLots = (lots: number, steps: number): RibbonLot[] =>
+export const ribbonForSpecs = (lots: number, steps: number): RibbonLot[] =>
   Array.from({ length: lots }, (_, lot) =>
     ribbonLot(
       `lot ${lot}`,

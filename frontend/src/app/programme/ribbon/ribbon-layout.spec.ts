@@ -1,4 +1,4 @@
-import { manyLots, ribbonLot, ribbonTask } from './ribbon-for-specs';
+import { ribbonForSpecs, ribbonLot, ribbonTask } from './ribbon-for-specs';
 import { ribbonLayout, type DrawnPart } from './ribbon-layout';
 
 const scale = { first_minutes: 0, last_minutes: 20_000, hour_px: 60 };
@@ -45,7 +45,7 @@ describe('The layout of the ribbon', () => {
   });
 
   it('draws only what is in view of sixty lots of forty steps', () => {
-    const rows = layoutOf(manyLots(60, 40), { left: 0, right: 1500, top: 680, bottom: 1360 });
+    const rows = layoutOf(ribbonForSpecs(60, 40), { left: 0, right: 1500, top: 680, bottom: 1360 });
     expect(rows.map(({ index }) => index)).toEqual([10, 11, 12, 13, 14, 15, 16, 17, 18, 19]);
     const drawn = rows.flatMap(({ tasks }) => tasks);
     expect(drawn.length).toBeLessThan(70);

@@ -1,5 +1,5 @@
 import { ribbonLot, ribbonTask } from './ribbon-for-specs';
-import { taskAfter } from './ribbon-steps';
+import { taskAfter } from './task-after';
 
 const lots = [
   ribbonLot('legs', [ribbonTask('a', 0), ribbonTask('b', 600)]),

@@ -1,5 +1,5 @@
 import { programmeFrame } from '#shared/programme/programme-frame';
-import { closedStretches, ribbonMarks } from './ribbon-days';
+import { closedStretches, ribbonMarks } from './ribbon-marks';
 
 const frame = programmeFrame('2027-03-26', 'Europe/Dublin');
 const scale = { first_minutes: 0, last_minutes: 20_160, hour_px: 10 };

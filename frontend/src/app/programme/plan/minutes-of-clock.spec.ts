@@ -1,5 +1,5 @@
 import { programmeFrame } from '#shared/programme/programme-frame';
-import { clockOfMinutes, minutesOfClock } from './clock-time';
+import { clockOfMinutes, minutesOfClock } from './minutes-of-clock';
 
 const frame = programmeFrame('2027-03-27', 'Europe/Dublin');
 
