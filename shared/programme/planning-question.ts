@@ -1,14 +1,9 @@
-import type { Programme } from '#shared/programme/programme-plan';
-import type { Remedy } from '#shared/programme/programme-remedies';
 import type { ProgrammeRequest, ProgrammeSearch } from '#shared/programme/programme-request';
 
-/** What is planned, and for how long a better plan is looked for; `helpsTask`: what would help this task is tried instead. */
+/** What a thread plans, and for how long; its stop is shared memory, so that it is seen in the midst of planning. */
 export interface PlanningQuestion {
   readonly request: ProgrammeRequest;
   readonly search: Omit<ProgrammeSearch, 'limit' | 'onBetter'>;
   readonly seconds: number;
-  readonly helpsTask?: string;
+  readonly stop: SharedArrayBuffer;
 }
-
-export type PlanningAnswer =
-  { readonly better: Programme } | { readonly plan: Programme } | { readonly remedies: readonly Remedy[] };

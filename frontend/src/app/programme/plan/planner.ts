@@ -2,7 +2,7 @@ import { DestroyRef, Injectable, inject, signal } from '@angular/core';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { Remedy } from '#shared/programme/programme-remedies';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
-import type { PlanningAnswer, PlanningQuestion } from '#shared/programme/planning-question';
+import type { PagePlanningAnswer, PagePlanning } from '#shared/programme/page-planning';
 import { PLANNING_STARTER } from './planning-starter';
 
 /** Somebody stopped before there was any plan. */
@@ -25,7 +25,7 @@ export class Planner {
     inject(DestroyRef).onDestroy(() => this.stop());
   }
 
-  async plan(question: PlanningQuestion): Promise<Programme> {
+  async plan(question: PagePlanning): Promise<Programme> {
     const answer = await this.ask(question);
     if ('plan' in answer) return answer.plan;
     throw new Error('the planning worker answered something else');
@@ -41,7 +41,7 @@ export class Planner {
     this.stopNow();
   }
 
-  private async ask(question: PlanningQuestion): Promise<PlanningAnswer> {
+  private async ask(question: PagePlanning): Promise<PagePlanningAnswer> {
     this.stopNow();
     this.bestPlan.set(undefined);
     this.working.set(true);
@@ -53,14 +53,14 @@ export class Planner {
     }
   }
 
-  private answerOf(worker: Worker, question: PlanningQuestion): Promise<PlanningAnswer> {
+  private answerOf(worker: Worker, question: PagePlanning): Promise<PagePlanningAnswer> {
     return new Promise((resolve, reject) => {
       this.stopNow = () => {
         const best = this.bestPlan();
         if (best) resolve({ plan: best });
         else reject(new PlanningStopped());
       };
-      worker.addEventListener('message', ({ data }: MessageEvent<PlanningAnswer>) => {
+      worker.addEventListener('message', ({ data }: MessageEvent<PagePlanningAnswer>) => {
         if ('better' in data) this.bestPlan.set(data.better);
         else resolve(data);
       });

@@ -1,11 +1,11 @@
 import { programme } from '#shared/programme/programme';
 import { programmeRemedies } from '#shared/programme/programme-remedies';
-import type { PlanningAnswer, PlanningQuestion } from '#shared/programme/planning-question';
+import type { PagePlanningAnswer, PagePlanning } from '#shared/programme/page-planning';
 
-const tell = (answer: PlanningAnswer): void => postMessage(answer);
+const tell = (answer: PagePlanningAnswer): void => postMessage(answer);
 
 /** Plans away from the page, and tells of each better plan on the way. */
-addEventListener('message', ({ data }: MessageEvent<PlanningQuestion>) => {
+addEventListener('message', ({ data }: MessageEvent<PagePlanning>) => {
   const { request, search, seconds, helpsTask } = data;
   if (helpsTask !== undefined) {
     tell({ remedies: programmeRemedies(request, helpsTask, { otherSizes: [] }) });

@@ -80,7 +80,7 @@ export class DatedRibbon {
   protected readonly marks = computed(() => ribbonMarks(this.view.part(), this.view.scale(), this.frame()));
   protected readonly days = computed(() =>
     this.marks()
-      .filter(({ kind }) => kind !== 'hour')
+      .filter(({ kind, x }) => kind !== 'hour' && x < this.view.width() - 40)
       .map((mark) => ({ x: mark.x, text: this.dayText(mark) })),
   );
   protected readonly closed = computed(() =>
