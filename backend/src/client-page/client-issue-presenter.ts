@@ -32,7 +32,7 @@ export interface ClientIssueFacts {
 type Summary = z.infer<typeof clientIssueSummarySchema>;
 
 export function presentClientSummary(
-  { row, estimate }: IssueOfEstimate,
+  { row, estimate, title }: IssueOfEstimate,
   at: { today: string; timeZone: string },
 ): Summary {
   return {
@@ -40,7 +40,7 @@ export function presentClientSummary(
     kind: estimate.kind,
     number: estimate.number,
     letter: row.letter,
-    title: estimate.settings.title,
+    title,
     state: issueStanding(row, at.today),
     issuedOn: dayOfInstant(row.issuedAt.getTime(), at.timeZone),
     validUntil: row.validUntil,
@@ -111,7 +111,7 @@ export function presentClientIssue(facts: ClientIssueFacts): ClientIssue {
   const ofEstimate = all.filter(({ estimate }) => estimate.id === issue.estimate.id);
   return {
     letterhead: presentClientLetterhead(workshop),
-    issue: { ...summary, title: snapshot.draft.settings.title },
+    issue: summary,
     replacedBy: row.state === 'replaced' ? (ofEstimate[0]?.row.id ?? null) : null,
     job: { id: job.id, ...snapshot.job },
     ...textsOf(issue),

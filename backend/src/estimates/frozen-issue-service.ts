@@ -25,6 +25,8 @@ interface Parts {
 export interface IssueOfEstimate {
   readonly row: IssueRow;
   readonly estimate: EstimateRow;
+  /** What it was called when it was issued; a later name of the draft is nobody else's business. */
+  readonly title: string;
 }
 
 /** An issue with all that it froze. */
@@ -50,7 +52,7 @@ export class FrozenIssueService {
     const rows = await this.parts.issues.ofEstimates(workshopId, [...byId.keys()]);
     return rows.flatMap((row) => {
       const estimate = byId.get(row.estimateId);
-      return estimate ? [{ row, estimate }] : [];
+      return estimate ? [{ row, estimate, title: thawedSnapshot(row).draft.settings.title }] : [];
     });
   }
 
@@ -90,6 +92,7 @@ export class FrozenIssueService {
 
   private async whole(row: IssueRow): Promise<FrozenIssue> {
     const estimate = await this.parts.estimates.get(row.workshopId, row.estimateId);
-    return { row, estimate, snapshot: thawedSnapshot(row) };
+    const snapshot = thawedSnapshot(row);
+    return { row, estimate, title: snapshot.draft.settings.title, snapshot };
   }
 }
