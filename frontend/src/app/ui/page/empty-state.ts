@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, booleanAttribute, input } from '@angular/core';
 import { Icon } from '../icon/icon';
 import type { IconName } from '../icon/icon-paths';
 
@@ -11,7 +11,11 @@ import type { IconName } from '../icon/icon-paths';
     @if (icon(); as name) {
       <app-icon [name]="name" />
     }
-    <h3>{{ heading() }}</h3>
+    @if (isUnderTitle()) {
+      <h2>{{ heading() }}</h2>
+    } @else {
+      <h3>{{ heading() }}</h3>
+    }
     <p class="muted">{{ text() }}</p>
     <div class="actions"><ng-content /></div>
   `,
@@ -22,6 +26,11 @@ import type { IconName } from '../icon/icon-paths';
       justify-items: start;
       max-width: 560px;
       padding: 32px 0;
+    }
+
+    h2 {
+      font-size: 1.3125rem;
+      line-height: 1.75rem;
     }
 
     app-icon {
@@ -39,4 +48,6 @@ export class EmptyState {
   readonly heading = input.required<string>();
   readonly text = input.required<string>();
   readonly icon = input<IconName>();
+  /** It stands right under the title of the page, so its heading is one of the second rank. */
+  readonly isUnderTitle = input(false, { transform: booleanAttribute });
 }
