@@ -1,5 +1,6 @@
 import * as z from 'zod';
 import { daysBetween } from '#shared/calendar/add-days';
+import { isDay } from '#shared/calendar/day';
 import { climateSchema } from '#shared/drying/drying-card-schema';
 import { cardItemId, complainAt, itemList } from '#shared/problems/card-entry-schema';
 import { complain } from '#shared/problems/complaints-of';
@@ -42,11 +43,12 @@ function daysInOrder(
   if (lastDay < firstDay) complainAt(context, ['lastDay'], complain('shop-days-end-before-start'));
 }
 
-/** Each of its days is laid out by itself. */
+/** Each of its days is laid out by itself. What is no day is told of by its own entry. */
 function isNotTooLong(
   { firstDay, lastDay }: { readonly firstDay: string; readonly lastDay: string },
   context: z.core.$RefinementCtx,
 ): void {
+  if (!isDay(firstDay) || !isDay(lastDay)) return;
   if (daysBetween(firstDay, lastDay) >= longestStretch_days)
     complainAt(context, ['lastDay'], complain('shop-days-too-long'));
 }
