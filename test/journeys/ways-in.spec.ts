@@ -94,7 +94,7 @@ it('lets somebody of two workshops choose between them, and found a third', asyn
   await person.page.goto(`${walk.address}/choose-workshop`);
   await person.see('journey choose workshop');
   await person.page.getByRole('button', { name: 'Kanarienvogel Carvers' }).click();
-  await person.page.waitForURL(/\/jobs/);
+  await person.page.waitForURL(/\/bench/);
   await person.page.locator('app-account-menu .opener').click();
   expect(await person.page.getByRole('menu').innerText()).toContain('Kanarienvogel Carvers');
   await person.page.goto(`${walk.address}/choose-workshop`);
