@@ -14,7 +14,7 @@ import {
   readInvoiceSettings,
   sendInvoice,
 } from '#shared/invoices/invoices-endpoints';
-import { readStatementPaper, remindOfInvoice } from '#shared/invoices/owed-endpoints';
+import { readStatementPaper, remindOfInvoice, sendStatement } from '#shared/invoices/owed-endpoints';
 import { listPayments, recordPayment, refundPayment, writeOff } from '#shared/invoices/payments-endpoints';
 import { listFeeds, makeFeed, readFeed } from '#shared/programme/board-endpoints';
 import { keepPlan, keepProgramme, keepShop, readProgramme, readShop } from '#shared/programme/programme-endpoints';
@@ -129,6 +129,8 @@ export class PlantedBooks {
     const paid = (await this.send(recordPayment, { body: { ...entry, reference: 'x' }, key })).body as { id: string };
     const back = { refundId: newId(), amount_minor: 500, refundedOn: entry.receivedOn, reference: 'x', reopens: true };
     await this.send(refundPayment, { params: { paymentId: paid.id }, body: back, key: randomUUID() });
+    const account = { from: entry.receivedOn, to: entry.receivedOn, note: 'x' };
+    await this.send(sendStatement, { params: { clientId }, body: account, key: randomUUID() });
     await this.send(writeOff, { params: { invoiceId }, body: { amount_minor: 100, reason: 'x' }, key: randomUUID() });
   }
 
