@@ -46,7 +46,10 @@ it('coats a member on its own by the keyboard alone, names its lot, and undoes i
   await page.getByRole('heading', { name: 'Coated together' }).click();
   await page.keyboard.press('Control+z');
   await page.keyboard.press('Control+z');
-  await page.getByRole('gridcell', { name: /Feet, assembled/ }).first().waitFor({ state: 'detached' });
+  await page
+    .getByRole('gridcell', { name: /Feet, assembled/ })
+    .first()
+    .waitFor({ state: 'detached' });
   // It is sent a moment after the last key.
   for (let tries = 0; tries < 100 && (await kept(sample)).at(1) !== ''; tries += 1) await page.waitForTimeout(100);
   expect(await kept(sample)).toEqual(['', '']);
