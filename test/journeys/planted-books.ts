@@ -130,7 +130,8 @@ export class PlantedBooks {
     const back = { refundId: newId(), amount_minor: 500, refundedOn: entry.receivedOn, reference: 'x', reopens: true };
     await this.send(refundPayment, { params: { paymentId: paid.id }, body: back, key: randomUUID() });
     const account = { from: entry.receivedOn, to: entry.receivedOn, note: 'x' };
-    await this.send(sendStatement, { params: { clientId }, body: account, key: randomUUID() });
+    const reached = (await walk.api.app.jobs.job(walk.api.ours.id, this.stage.sent[0].jobId)).clientId;
+    await this.send(sendStatement, { params: { clientId: reached }, body: account, key: randomUUID() });
     await this.send(writeOff, { params: { invoiceId }, body: { amount_minor: 100, reason: 'x' }, key: randomUUID() });
   }
 
