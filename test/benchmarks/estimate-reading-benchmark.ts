@@ -28,7 +28,12 @@ async function largeEstimate(api: Api): Promise<string> {
 function bareRoute({ platform, app, ours }: Api, estimateId: string): Express {
   const { config, database, clock } = platform;
   const bare = express();
-  const sessions = new Sessions(config, new SessionStore(database, clock), app.accounts.identities, app.agreements.visits);
+  const sessions = new Sessions(
+    config,
+    new SessionStore(database, clock),
+    app.accounts.identities,
+    app.agreements.visits,
+  );
   bare.use(sessions.middleware());
   bare.get('/bare', async (request, response) => {
     if (!request.user) return void response.status(401).end();

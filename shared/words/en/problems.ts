@@ -10,7 +10,8 @@ export const problems = {
   'problem-too-large': 'That is larger than {limit} allows.',
   'problem-unsupported': 'This kind of content is not accepted here.',
   'problem-forged': 'The request did not come from this application. Reload the page and try again.',
-  'problem-unavailable': 'The workshop’s records cannot be reached for the moment. Nothing was lost; please try again shortly.',
+  'problem-unavailable':
+    'The workshop’s records cannot be reached for the moment. Nothing was lost; please try again shortly.',
   'problem-busy': 'There is more of this in hand than can be done at once. Nothing was lost; please try again shortly.',
   'problem-gone': 'This link has been used already or is too old. Please ask for a new one.',
   'problem-no-version': 'The request does not say which version it changes (If-Match).',

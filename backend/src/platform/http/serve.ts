@@ -97,7 +97,9 @@ export function serve(route: Route, serving: Serving): RequestHandler {
       endpoint.method === 'get'
         ? () => run(request, call)
         : () => serving.database.transaction(() => once(request, call));
-    const answer = await (turns ? turns.take(work) : work()).catch((error: unknown) => Promise.reject(withCurrent(route, call, error) as Error));
+    const answer = await (turns ? turns.take(work) : work()).catch((error: unknown) =>
+      Promise.reject(withCurrent(route, call, error) as Error),
+    );
     send(endpoint, { request, response }, answer);
   };
 }

@@ -37,7 +37,10 @@ async function whole(stream: Readable): Promise<Buffer> {
 export function readMail(source: string, at: string): CaughtMail {
   const parts = mailParts(source);
   const textOf = (media: string): string =>
-    parts.find((part) => part.media === media && part.name === '')?.bytes.toString('utf8').replace(/\r\n/g, '\n') ?? '';
+    parts
+      .find((part) => part.media === media && part.name === '')
+      ?.bytes.toString('utf8')
+      .replace(/\r\n/g, '\n') ?? '';
   const enclosures = parts
     .filter(({ name }) => name !== '')
     .map(({ name, media, bytes }) => ({ name, media, size_bytes: bytes.length, sha256: hashOf(bytes) }));
