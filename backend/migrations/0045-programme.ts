@@ -67,6 +67,7 @@ export const programme = migration('0045-programme', [
     person_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NULL,
     secret_hash CHAR(64) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
     made_by VARCHAR(120) NOT NULL,
+    membership_id CHAR(36) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
     made_at DATETIME(3) NOT NULL,
     revoked_at DATETIME(3) NULL,
     read_at DATETIME(3) NULL,

@@ -87,6 +87,13 @@ describe('The day at the bench', () => {
     ).toEqual(['tone']);
   });
 
+  it('names the next day after it with work for them, where there is one', () => {
+    expect(benchDayOf([job()], asked({ personId: 'tom' })).nextDay).toBe('2027-01-06');
+    expect(benchDayOf([job()], asked({ personId: 'tom', day: '2027-01-06' })).nextDay).toBeNull();
+    expect(benchDayOf([job()], asked()).nextDay).toBeNull();
+    expect(benchDayOf([job()], asked({ personId: null })).nextDay).toBe('2027-01-06');
+  });
+
   it('tells when the coat below is dry and when its window closes, slower where the air is: 2 h × 1.5 and 4 h × 1.5 from nine', () => {
     expect(lay(job())).toMatchObject({
       readyAt: '2027-01-04T12:00:00.000Z',

@@ -2,7 +2,13 @@ import { addDays } from '#shared/calendar/add-days';
 import type { Day } from '#shared/calendar/day';
 import type { BenchState, BenchTask } from '#shared/programme/bench-task';
 import { paceProgress } from '#shared/programme/lag-progress';
-import { instantOf, minutesOf, minutesOfDay, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import {
+  dayOfMinutes,
+  instantOf,
+  minutesOf,
+  minutesOfDay,
+  type ProgrammeFrame,
+} from '#shared/programme/programme-frame';
 import type { TaskMark } from '#shared/programme/programme-inputs';
 import type { ProgrammeItem } from '#shared/programme/programme-item';
 import type { PlannedTask } from '#shared/programme/programme-plan';
@@ -141,6 +147,8 @@ export interface BenchDayLists {
   readonly tasks: BenchTask[];
   readonly coatsReady: BenchTask[];
   readonly windowsClosing: BenchTask[];
+  /** The next day after it on which there is work for them; null where none is planned. */
+  readonly nextDay: Day | null;
 }
 
 const within = (instant: string | null, from: string, to: string): boolean =>
@@ -149,11 +157,24 @@ const within = (instant: string | null, from: string, to: string): boolean =>
 const byInstant = (of: (task: BenchTask) => string | null) => (one: BenchTask, other: BenchTask) =>
   (of(one) ?? '').localeCompare(of(other) ?? '') || one.taskId.localeCompare(other.taskId);
 
+/** The first day from a moment on that has a span of somebody's work. */
+function nextWorkDay(tasks: readonly PlannedTask[], from: number, frame: ProgrammeFrame): Day | null {
+  const starts = tasks
+    .flatMap(({ spans }) => spans)
+    .flatMap(({ start_minutes }) => (start_minutes >= from ? [start_minutes] : []));
+  return starts.length > 0
+    ? dayOfMinutes(
+        starts.reduce((one, other) => Math.min(one, other)),
+        frame,
+      )
+    : null;
+}
+
 const isOpen = ({ state }: BenchTask): boolean => state !== 'finished' && state !== 'started';
 
 /**
  * What somebody does on a day: their tasks planned or begun then, and such of earlier days as are not finished, in order; besides, whoever goes on
- * with them, coats that are dry by the end of the day and windows that close in it.
+ * with them, coats that are dry by the end of the day, windows that close in it, and the next day with work.
  */
 export function benchDayOf(jobs: readonly BenchJob[], asked: BenchAsked): BenchDayLists {
   const { day, frame, personId } = asked;
@@ -166,14 +187,22 @@ export function benchDayOf(jobs: readonly BenchJob[], asked: BenchAsked): BenchD
       return task && item.kind !== 'carved' ? [{ planned: task, task: benchTask(item, task, { known, asked }) }] : [];
     });
   });
+  const isMine = ({ personIds }: PlannedTask) => personId === null || personIds.includes(personId);
   const own = all.filter(({ planned, task }) => {
-    const mine = personId === null || planned.personIds.includes(personId);
     const isToday = planned.spans.some((span) => span.start_minutes < to && span.end_minutes > from);
     const isLeft = planned.end_minutes <= from && task.state !== 'finished' && from <= asked.now_minutes;
-    return mine && planned.personIds.length > 0 && (isToday || isLeft || within(task.endsAt, fromInstant, toInstant));
+    return (
+      isMine(planned) &&
+      planned.personIds.length > 0 &&
+      (isToday || isLeft || within(task.endsAt, fromInstant, toInstant))
+    );
   });
   const open = all.map(({ task }) => task).filter(isOpen);
+  const later = all
+    .filter(({ planned, task }) => isMine(planned) && task.state !== 'finished')
+    .map(({ planned }) => planned);
   return {
+    nextDay: nextWorkDay(later, to, frame),
     tasks: own.map(({ task }) => task).sort(byInstant((task) => task.startsAt)),
     coatsReady: open
       .filter(({ state, readyAt: dry }) => state !== 'waiting' && dry !== null && dry < toInstant)

@@ -42,6 +42,8 @@ export const benchDaySchema = z.strictObject({
   coatsReady: z.array(benchTaskSchema),
   /** Windows that close today, the first one first. */
   windowsClosing: z.array(benchTaskSchema),
+  /** The next day with work for them; null where none is planned. */
+  nextDay: day.nullable(),
 });
 export type BenchDay = z.infer<typeof benchDaySchema>;
 

@@ -447,12 +447,26 @@ describe('A calendar for other programs', () => {
     const { content } = await shopWith(api.ours, api.ours.people.bench);
     const { secret } = await feed(visitor, content.people[0].id);
     expect((await read(secret)).status).toBe(200);
+    const manager = await api.newcomer(api.ours, 'office');
+    const { secret: ofAll } = await feed(manager.visitor, null);
+    expect((await read(ofAll)).status).toBe(200);
     const people = await api.app.accounts.people.list(api.ours.id);
     const version = people.find(({ id }) => id === actor.membershipId)?.version ?? 0;
     await api.platform.database.transaction(() =>
       api.app.accounts.people.changeAccess(api.ours.people.owner.actor, { id: actor.membershipId, version }, true),
     );
     expect((await read(secret)).status).toBe(404);
+    const managing = (await api.app.accounts.people.list(api.ours.id)).find(
+      ({ id }) => id === manager.actor.membershipId,
+    );
+    await api.platform.database.transaction(() =>
+      api.app.accounts.people.changeAccess(
+        api.ours.people.owner.actor,
+        { id: manager.actor.membershipId, version: managing?.version ?? 0 },
+        true,
+      ),
+    );
+    expect((await read(ofAll)).status).toBe(404);
   });
 
   test('given another address leads nowhere by the old one', async () => {

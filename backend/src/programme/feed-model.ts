@@ -9,6 +9,8 @@ export interface FeedRow extends WorkshopRow {
   readonly personId: string | null;
   readonly secretHash: string;
   readonly madeBy: string;
+  /** Whose access it stands and falls with where it shows everybody's work. */
+  readonly membershipId: string;
   readonly madeAt: Date;
   readonly revokedAt: Date | null;
   readonly readAt: Date | null;
@@ -22,6 +24,7 @@ export const feedTable = (database: Database) =>
     personId: column.reference,
     secretHash: column.hash,
     madeBy: column.word,
+    membershipId: column.reference,
     madeAt: column.instant,
     revokedAt: column.instant,
     readAt: column.instant,

@@ -69,6 +69,7 @@ export class FeedService {
       ...entry,
       secretHash: hashOf(secret),
       madeBy: actor.name,
+      membershipId: actor.membershipId,
       madeAt: clock.now(),
       revokedAt: null,
       readAt: null,
@@ -120,11 +121,10 @@ export class FeedService {
     });
   }
 
-  /** Somebody whose access to the workshop has ended reads its calendars no more, whoever made them. */
-  private async hasLeft({ workshopId, personId }: FeedRow): Promise<boolean> {
-    if (personId === null) return false;
-    const shop = await this.parts.shops.shop(workshopId);
-    const membershipId = shop.people.find(({ id }) => id === personId)?.membershipId;
+  /** Somebody whose access to the workshop has ended reads its calendars no more: their own work, whoever made it, and what they made of all. */
+  private async hasLeft({ workshopId, personId, membershipId: maker }: FeedRow): Promise<boolean> {
+    const { people } = await this.parts.shops.shop(workshopId);
+    const membershipId = personId === null ? maker : people.find(({ id }) => id === personId)?.membershipId;
     if (!membershipId) return false;
     const members = await this.parts.people.list(workshopId);
     return members.some(({ id, disabledAt }) => id === membershipId && disabledAt !== null);

@@ -2,33 +2,24 @@ import { ChangeDetectionStrategy, Component, computed, inject, input, resource }
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import type { Job } from '#shared/jobs/job-schema';
-import { Formats } from '../core/formats/formats';
 import { schemaForm } from '../core/forms/schema-form';
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
 import { FormComplaint } from '../ui/field/form-complaint';
+import { ThreadList } from '../ui/page/thread-list';
 import { AgreementCalls } from './agreement-calls';
 import { answerFormSchema } from './answer-form';
 
 /** What the client of a job asked, and where it is answered. */
 @Component({
   selector: 'app-job-thread',
-  imports: [Entry, Field, FormComplaint, MatButton, ReactiveFormsModule],
+  imports: [Entry, Field, FormComplaint, MatButton, ReactiveFormsModule, ThreadList],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @if (questions().length > 0) {
       <section class="stack">
         <h2 i18n>Questions of the client</h2>
-        <ol class="plain">
-          @for (question of questions(); track question.id) {
-            <li [class]="question.author">
-              <p class="muted small">
-                {{ question.name }}, {{ formats.dayOf(question.at) }}, {{ formats.time(question.at) }}
-              </p>
-              <p class="text">{{ question.text }}</p>
-            </li>
-          }
-        </ol>
+        <app-thread-list otherSide="client" [entries]="questions()" />
         <form class="fields single" [formGroup]="form.group" (ngSubmit)="send()">
           <app-field
             i18n-label
@@ -47,30 +38,9 @@ import { answerFormSchema } from './answer-form';
       </section>
     }
   `,
-  styles: `
-    li {
-      margin-bottom: 8px;
-      padding: 8px 0 8px 16px;
-      border-left: 3px solid var(--gold);
-    }
-
-    li.workshop {
-      border-color: var(--line);
-    }
-
-    .small {
-      font-size: 0.9375rem;
-    }
-
-    .text {
-      white-space: pre-line;
-      overflow-wrap: anywhere;
-    }
-  `,
 })
 export class JobThread {
   private readonly calls = inject(AgreementCalls);
-  protected readonly formats = inject(Formats);
 
   readonly job = input.required<Job>();
 

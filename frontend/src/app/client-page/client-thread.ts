@@ -4,27 +4,22 @@ import { MatButton } from '@angular/material/button';
 import { askClientQuestion } from '#shared/client-page/client-issues-endpoints';
 import { Api } from '../core/api/api';
 import { schemaForm } from '../core/forms/schema-form';
-import { Formats } from '../core/formats/formats';
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
 import { FormComplaint } from '../ui/field/form-complaint';
+import { ThreadList } from '../ui/page/thread-list';
 import { ClientIssueStore } from './client-issue-store';
 
 /** What was asked about the job and answered, and where to ask. */
 @Component({
   selector: 'app-client-thread',
-  imports: [Entry, Field, FormComplaint, MatButton, ReactiveFormsModule],
+  imports: [Entry, Field, FormComplaint, MatButton, ReactiveFormsModule, ThreadList],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @if (store.issue(); as issue) {
-      <ol class="plain">
-        @for (question of issue.questions; track question.id) {
-          <li [class]="question.author">
-            <p class="muted">{{ question.name }}, {{ formats.dayOf(question.at) }}, {{ formats.time(question.at) }}</p>
-            <p class="text">{{ question.text }}</p>
-          </li>
-        }
-      </ol>
+      @if (issue.questions.length > 0) {
+        <app-thread-list otherSide="workshop" [entries]="issue.questions" />
+      }
       <form class="fields single no-print" [formGroup]="form.group" (ngSubmit)="send(issue.issue.id)">
         <app-field
           i18n-label
@@ -47,30 +42,11 @@ import { ClientIssueStore } from './client-issue-store';
       display: grid;
       gap: 16px;
     }
-
-    ol:empty {
-      display: none;
-    }
-
-    li {
-      padding: 8px 0 8px 16px;
-      border-left: 3px solid var(--line);
-    }
-
-    li.workshop {
-      border-color: var(--gold);
-    }
-
-    .text {
-      white-space: pre-line;
-      overflow-wrap: anywhere;
-    }
   `,
 })
 export class ClientThread {
   private readonly api = inject(Api);
   protected readonly store = inject(ClientIssueStore);
-  protected readonly formats = inject(Formats);
   protected readonly form = schemaForm(askClientQuestion.body, { text: '' });
 
   protected async send(issueId: string): Promise<void> {

@@ -14,7 +14,7 @@ import {
   removeInvoice,
   sendInvoice,
 } from '#shared/invoices/invoices-endpoints';
-import { readJournal, readOwed, readStatement, remindOfInvoice } from '#shared/invoices/owed-endpoints';
+import { readJournal, readOwed, readStatement, remindOfInvoice, sendStatement } from '#shared/invoices/owed-endpoints';
 import type { PaymentEntry, RefundEntry } from '#shared/invoices/payment-schema';
 import type { Share } from '#shared/invoices/payment-shares';
 import {
@@ -83,6 +83,10 @@ export class InvoiceCalls {
 
   async remind(invoiceId: string, note: string, idempotencyKey: string): Promise<void> {
     await this.api.call(remindOfInvoice, { params: { invoiceId }, body: { note }, idempotencyKey });
+  }
+
+  async mailStatement(clientId: string, body: Period & { note: string }, idempotencyKey: string): Promise<void> {
+    await this.api.call(sendStatement, { params: { clientId }, body, idempotencyKey });
   }
 
   writeOff(invoiceId: string, body: { amount_minor: number; reason: string }, idempotencyKey: string) {

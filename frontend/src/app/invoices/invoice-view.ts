@@ -11,9 +11,9 @@ import { Notices } from '../core/problems/notices';
 import { ProblemError } from '../core/problems/problem-error';
 import { Session } from '../core/session/session';
 import { InvoiceCalls } from './invoice-calls';
-import { InvoiceLetterForm } from './invoice-letter-form';
 import { InvoiceRelated } from './invoice-related';
 import { InvoiceSums } from './invoice-sums';
+import { NotedLetterForm } from './noted-letter-form';
 import { isRated, taxCodeNames } from './tax-code-names';
 import { WriteOffForm } from './write-off-form';
 
@@ -25,7 +25,7 @@ const paperNames: Readonly<Record<InvoicePaper, string>> = {
 /** An issued invoice or credit note: what stands on it, what is open, its papers, and what may be done about it. */
 @Component({
   selector: 'app-invoice-view',
-  imports: [InvoiceLetterForm, InvoiceRelated, InvoiceSums, MatButton, RouterLink, WriteOffForm],
+  imports: [InvoiceRelated, InvoiceSums, MatButton, NotedLetterForm, RouterLink, WriteOffForm],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './invoice-view.html',
   styleUrl: './invoice-view.scss',
@@ -61,6 +61,14 @@ export class InvoiceView {
       address: addressOf(readInvoicePaper, { params: { invoiceId: id, paper } }),
     }));
   });
+  protected readonly letterAbout = computed(() => {
+    const { email, name } = this.invoice().content.buyer;
+    return email
+      ? $localize`It goes to ${email}:email:.`
+      : $localize`No e-mail address of ${name}:name: stands on the invoice.`;
+  });
+  protected readonly mail = (note: string, key: string) => this.calls.mail(this.invoice().id, note, key);
+  protected readonly remind = (note: string, key: string) => this.calls.remind(this.invoice().id, note, key);
   protected readonly lines = computed(() => {
     const { content, totals, currency } = this.invoice();
     return content.lines.map((line, place) => ({

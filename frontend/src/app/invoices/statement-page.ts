@@ -1,15 +1,17 @@
-import { ChangeDetectionStrategy, Component, computed, effect, inject, input, resource } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, effect, inject, input, resource, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { Router, RouterLink } from '@angular/router';
 import { readStatementPaper } from '#shared/invoices/owed-endpoints';
 import { addressOf } from '../core/api/address-of';
 import { Formats } from '../core/formats/formats';
 import { PageTitle } from '../core/routing/page-title';
+import { Session } from '../core/session/session';
 import { EmptyState } from '../ui/page/empty-state';
 import { PageHeader } from '../ui/page/page-header';
 import { Skeleton } from '../ui/page/skeleton';
 import { InvoiceCalls, type Period } from './invoice-calls';
 import { ledgerEntryNames } from './invoice-names';
+import { NotedLetterForm } from './noted-letter-form';
 import { PeriodField } from './period-field';
 import { yearOf } from './month-of';
 import { workshopToday } from './workshop-today';
@@ -17,7 +19,7 @@ import { workshopToday } from './workshop-today';
 /** The account of one client: what was owed before, every movement with what was owed after it, and the same as a paper. */
 @Component({
   selector: 'app-statement-page',
-  imports: [EmptyState, MatButton, PageHeader, PeriodField, RouterLink, Skeleton],
+  imports: [EmptyState, MatButton, NotedLetterForm, PageHeader, PeriodField, RouterLink, Skeleton],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './statement-page.html',
   styleUrl: './statement-page.scss',
@@ -25,6 +27,7 @@ import { workshopToday } from './workshop-today';
 export class StatementPage {
   private readonly calls = inject(InvoiceCalls);
   private readonly router = inject(Router);
+  private readonly session = inject(Session);
   private readonly title = inject(PageTitle, { optional: true });
   protected readonly formats = inject(Formats);
 
@@ -49,6 +52,11 @@ export class StatementPage {
   protected readonly paper = computed(() =>
     addressOf(readStatementPaper, { params: { clientId: this.clientId() }, query: { ...this.period() } }),
   );
+
+  protected readonly mayMail = computed(() => this.session.may('owner', 'office'));
+  protected readonly isMailing = signal(false);
+  protected readonly mail = (note: string, key: string) =>
+    this.calls.mailStatement(this.clientId(), { ...this.period(), note }, key);
 
   constructor() {
     effect(() => {

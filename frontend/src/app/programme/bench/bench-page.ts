@@ -40,7 +40,7 @@ const minute_ms = 60_000;
 })
 export class BenchPage {
   private readonly client = inject(BenchClient);
-  private readonly formats = inject(Formats);
+  protected readonly formats = inject(Formats);
   private readonly notices = inject(Notices);
   private readonly session = inject(Session);
   private readonly clock = inject(NOW);
@@ -127,7 +127,10 @@ export class BenchPage {
   }
 
   protected step(days: number): void {
-    const day = addDays(this.day(), days);
+    this.open(addDays(this.day(), days));
+  }
+
+  protected open(day: string): void {
     this.asked.set(day === this.today() ? undefined : day);
   }
 

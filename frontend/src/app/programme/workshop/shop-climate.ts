@@ -85,6 +85,17 @@ const begin: Climate = { temperature_celsius: 20, humidity_percent: 50 };
       width: 104px;
     }
 
+    @media (max-width: 640px) {
+      th,
+      td {
+        padding-right: 8px;
+      }
+
+      .entry {
+        width: 84px;
+      }
+    }
+
     .wrong {
       color: var(--wrong);
       font-size: 0.9375rem;

@@ -1,7 +1,6 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
+import { ChangeDetectionStrategy, Component, inject, input, output } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
-import type { Invoice } from '#shared/invoices/invoice-schema';
 import { sendInvoice } from '#shared/invoices/invoices-endpoints';
 import { schemaForm } from '../core/forms/schema-form';
 import { Notices } from '../core/problems/notices';
@@ -10,11 +9,10 @@ import { Field } from '../ui/field/field';
 import { focusFirst } from '../ui/field/focus-first';
 import { FormComplaint } from '../ui/field/form-complaint';
 import { DeedKey } from './deed-key';
-import { InvoiceCalls } from './invoice-calls';
 
-/** Mails an invoice with its papers, or a reminder of it, with a few words of one's own. */
+/** Mails something with a few words of one's own: an invoice, a reminder of it, a statement. */
 @Component({
-  selector: 'app-invoice-letter-form',
+  selector: 'app-noted-letter-form',
   imports: [Entry, Field, FormComplaint, MatButton, ReactiveFormsModule],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
@@ -31,37 +29,27 @@ import { InvoiceCalls } from './invoice-calls';
     </form>
   `,
 })
-export class InvoiceLetterForm {
-  private readonly calls = inject(InvoiceCalls);
+export class NotedLetterForm {
   private readonly notices = inject(Notices);
   private readonly key = new DeedKey();
 
-  readonly invoice = input.required<Invoice>();
-  readonly way = input.required<'letter' | 'reminder'>();
+  /** To whom it goes. */
+  readonly about = input.required<string>();
+  readonly label = input.required<string>();
+  /** Sends it with the note, once for each key. */
+  readonly mail = input.required<(note: string, idempotencyKey: string) => Promise<void>>();
   readonly done = output();
   readonly closed = output();
 
   protected readonly form = schemaForm(sendInvoice.body, { note: '' });
-  protected readonly about = computed(() => {
-    const { email, name } = this.invoice().content.buyer;
-    return email
-      ? $localize`It goes to ${email}:email:.`
-      : $localize`No e-mail address of ${name}:name: stands on the invoice.`;
-  });
-  protected readonly label = computed(() =>
-    this.way() === 'letter' ? $localize`Mail it now` : $localize`Send the reminder`,
-  );
 
   constructor() {
     focusFirst();
   }
 
   protected async send(): Promise<void> {
-    const { id } = this.invoice();
     await this.form.send(async ({ note }) => {
-      const key = this.key.of([id, this.way(), note]);
-      if (this.way() === 'letter') await this.calls.mail(id, note, key);
-      else await this.calls.remind(id, note, key);
+      await this.mail()(note, this.key.of([this.label(), note]));
       this.notices.say($localize`The letter is on its way.`);
       this.done.emit();
     });
