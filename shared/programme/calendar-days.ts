@@ -1,6 +1,6 @@
 import { addDays } from '#shared/calendar/add-days';
-import { type Day, dayNumber } from '#shared/calendar/day';
-import { weekdayOf } from '#shared/calendar/working-days';
+import { type Day, dayNumber, dayOfNumber } from '#shared/calendar/day';
+import { type Weekday, weekdayOf } from '#shared/calendar/working-days';
 import type { DayException, DayHours, MomentSpan, ShopCalendar, WeekHours } from '#shared/programme/shop-calendar';
 
 const dayLength_minutes = 1440;
@@ -8,6 +8,7 @@ const dayLength_minutes = 1440;
 /** One day of a calendar: when it starts, and by how much the clock is ahead of the minutes gone by once work begins. */
 export interface CalendarDay {
   readonly day: Day;
+  readonly weekday: Weekday;
   readonly start_minutes: number;
   readonly length_minutes: number;
 }
@@ -15,20 +16,27 @@ export interface CalendarDay {
 /** The first days of a calendar, so many, with their starts in minutes from the start of the first. */
 export function calendarDays({ firstDay, oddDays }: ShopCalendar, count: number): CalendarDay[] {
   const lengths = new Map(oddDays.map((odd) => [odd.day, odd.length_minutes]));
-  const days: CalendarDay[] = [];
+  const [days, first, weekday]: [CalendarDay[], number, number] = [[], dayNumber(firstDay), weekdayOf(firstDay)];
   let start_minutes = 0;
   for (let at = 0; at < count; at += 1) {
-    const day = addDays(firstDay, at);
+    const day = dayOfNumber(first + at);
     const length_minutes = lengths.get(day) ?? dayLength_minutes;
-    days.push({ day, start_minutes, length_minutes });
+    days.push({ day, weekday: (((weekday - 1 + at) % 7) + 1) as Weekday, start_minutes, length_minutes });
     start_minutes += length_minutes;
   }
   return days;
 }
 
-/** The hours of a day by the wall clock. */
+/** The hours of a day of a calendar by the wall clock. */
+export const hoursOn = (
+  { day, weekday }: Pick<CalendarDay, 'day' | 'weekday'>,
+  week: WeekHours,
+  exceptions: ReadonlyMap<Day, DayHours>,
+): DayHours => exceptions.get(day) ?? week[weekday] ?? [];
+
+/** The hours of any day by the wall clock. */
 export const hoursOf = (day: Day, week: WeekHours, exceptions: ReadonlyMap<Day, DayHours>): DayHours =>
-  exceptions.get(day) ?? week[weekdayOf(day)] ?? [];
+  hoursOn({ day, weekday: weekdayOf(day) }, week, exceptions);
 
 /** Hours that differ from those of the weekday, by their day. */
 export const exceptionsByDay = (exceptions: readonly DayException[]): ReadonlyMap<Day, DayHours> =>

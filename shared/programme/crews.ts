@@ -28,10 +28,13 @@ function spansOf(members: readonly number[], hours: CrewHours): WorkingSpans {
   return known;
 }
 
-/** All ways of choosing so many of a list, in its order. */
-function choices(of: readonly number[], count: number): number[][] {
+/** The first ways of choosing so many of a list, in its order, and no more than are asked for: of a hundred people there are more than anybody can count. */
+function choices(of: readonly number[], count: number, most: number): number[][] {
   if (count === 0) return [[]];
-  return of.flatMap((one, at) => choices(of.slice(at + 1), count - 1).map((rest) => [one, ...rest]));
+  const found: number[][] = [];
+  for (let at = 0; at + count <= of.length && found.length < most; at += 1)
+    for (const rest of choices(of.slice(at + 1), count - 1, most - found.length)) found.push([of[at], ...rest]);
+  return found;
 }
 
 /** Minutes of working hours in which hands-on minutes get done. */
@@ -50,13 +53,14 @@ export function crewsOf(task: ProgrammeTask, hours: CrewHours): Crew[] {
     .sort((a, b) => people[a].gradeIds.length - people[b].gradeIds.length || a - b);
   const most = Math.min(Math.max(task.mostPeople, task.crew), able.length);
   const crews: Crew[] = [];
-  for (let count = task.crew; count <= most; count += 1) {
+  for (let count = task.crew; count <= most && crews.length < mostCrews; count += 1) {
     const handsOn_minutes = count === 0 ? task.handsOn_minutes : (task.handsOn_minutes * task.crew) / count;
     const work = workMinutes(handsOn_minutes, productiveShare_percent);
-    for (const members of choices(able, count)) crews.push({ people: members, spans: spansOf(members, hours), work });
+    for (const members of choices(able, count, mostCrews - crews.length))
+      crews.push({ people: members, spans: spansOf(members, hours), work });
     if (task.crew === 0) break;
   }
-  return crews.slice(0, mostCrews);
+  return crews;
 }
 
 /** A crew of the people who were at a task, whatever their grade, with the working minutes of what is left of it. */

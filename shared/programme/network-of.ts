@@ -1,5 +1,5 @@
 import { addDays, daysBetween } from '#shared/calendar/add-days';
-import { calendarDays, exceptionsByDay, hoursOf, type CalendarDay } from '#shared/programme/calendar-days';
+import { calendarDays, exceptionsByDay, hoursOn, type CalendarDay } from '#shared/programme/calendar-days';
 import { crewAtWork, crewsOf, type CrewHours } from '#shared/programme/crews';
 import { firstPosition } from '#shared/programme/earliest-times';
 import {
@@ -10,7 +10,7 @@ import {
   type LagProgress,
 } from '#shared/programme/lag-progress';
 import { lagShift } from '#shared/programme/lag-shift';
-import { personSpans, shopSpans } from '#shared/programme/person-spans';
+import { peopleSpans, shopSpans } from '#shared/programme/person-spans';
 import type { ProgrammeLag, ProgrammeRequest, ProgrammeTask } from '#shared/programme/programme-request';
 import {
   taskNetwork,
@@ -29,10 +29,11 @@ export interface NetworkOverDays {
 type ProgressOf = (lag: Pick<ProgrammeLag, 'time' | 'paceId'>) => LagProgress;
 
 function crewHours({ calendar, people }: ProgrammeRequest, dates: readonly CalendarDay[]): CrewHours {
+  const shop = shopSpans(dates, calendar);
   return {
     people,
-    spans: people.map((person) => personSpans(dates, person, calendar)),
-    shop: shopSpans(dates, calendar),
+    spans: peopleSpans(dates, { people, calendar }, shop),
+    shop,
     productiveShare_percent: calendar.productiveShare_percent,
     common: new Map(),
   };
@@ -45,7 +46,7 @@ function progressOf(
 ): ProgressOf {
   const byPace = new Map(paces.map((pace) => [pace.id, paceProgress(pace)]));
   const exceptions = exceptionsByDay(calendar.exceptions);
-  const byDay = dayProgress(dates, (at) => hoursOf(dates[at].day, calendar.week, exceptions).length > 0);
+  const byDay = dayProgress(dates, (at) => hoursOn(dates[at], calendar.week, exceptions).length > 0);
   const byWork = workProgress(hours.shop);
   return ({ time, paceId }) => {
     if (time === 'work') return byWork;

@@ -1,4 +1,4 @@
-import { exceptionsByDay, hoursOf, momentsOf, type CalendarDay } from '#shared/programme/calendar-days';
+import { exceptionsByDay, hoursOn, momentsOf, type CalendarDay } from '#shared/programme/calendar-days';
 import type { MomentSpan, Person, ShopCalendar, WeekHours } from '#shared/programme/shop-calendar';
 import { WorkingSpans, type GroupedSpan } from '#shared/programme/working-spans';
 
@@ -52,7 +52,7 @@ function joined(spans: readonly GroupedSpan[]): GroupedSpan[] {
 function spansOf(days: readonly CalendarDay[], week: WeekHours, exceptions: ShopCalendar['exceptions']): GroupedSpan[] {
   const byDay = exceptionsByDay(exceptions);
   const spans = days.flatMap((day, group) =>
-    momentsOf(hoursOf(day.day, week, byDay), day).map((span) => ({ ...span, group })),
+    momentsOf(hoursOn(day, week, byDay), day).map((span) => ({ ...span, group })),
   );
   return joined(spans.filter((span) => span.start_minutes < span.end_minutes));
 }
@@ -66,6 +66,17 @@ export function personSpans(days: readonly CalendarDay[], person: Person, calend
   const exceptions = [...calendar.exceptions, ...person.exceptions];
   return new WorkingSpans(without(spansOf(days, person.week ?? calendar.week, exceptions), person.away));
 }
+
+/** The hours of each of several people; those who have the workshop's hours have them worked out once (`shop`). */
+export const peopleSpans = (
+  days: readonly CalendarDay[],
+  { people, calendar }: { readonly people: readonly Person[]; readonly calendar: ShopCalendar },
+  shop: WorkingSpans,
+): WorkingSpans[] =>
+  people.map((person) => {
+    if (person.week !== null || person.exceptions.length > 0) return personSpans(days, person, calendar);
+    return person.away.length === 0 ? shop : new WorkingSpans(without(shop.spans, person.away));
+  });
 
 /** The hours at which all of several people work. */
 export function commonSpans(one: WorkingSpans, other: WorkingSpans): WorkingSpans {

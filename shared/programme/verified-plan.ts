@@ -61,6 +61,19 @@ function tasksUnknown(plan: Programme, { tasks }: ProgrammeRequest): Finding[] {
   return unknown === 0 ? [] : [{ kind: 'refuse', code: 'programme-breaks-unknown', values: { tasks: unknown } }];
 }
 
+/** No plan is checked whose work begins more than ten years after its programme: calendars are laid out day by day as far as it reaches. */
+const reach_minutes = 3653 * 1440;
+
+/** What begins beyond the reach of a plan. */
+function tasksFar(plan: Programme, { tasks, start_minutes }: ProgrammeRequest): Finding[] {
+  const far = new Set(
+    plan.tasks.filter((task) => task.start_minutes > start_minutes + reach_minutes).map(({ taskId }) => taskId),
+  );
+  return tasks
+    .filter(({ id }) => far.has(id))
+    .map(({ id, name }) => ({ kind: 'refuse', code: 'programme-breaks-far', values: { task: name }, about: id }));
+}
+
 function bounded(plan: Programme, request: ProgrammeRequest, finish: number) {
   const lowerBound_minutes = Math.min(Math.max(plan.lowerBound_minutes, request.start_minutes), finish);
   const whole = lowerBound_minutes - request.start_minutes;
@@ -72,9 +85,9 @@ function bounded(plan: Programme, request: ProgrammeRequest, finish: number) {
  * twice. Starts and people are taken from it, everything else is worked out again; the bound is the asker's. Minutes of the request's calendar.
  */
 export function verifiedPlan(plan: Programme, request: ProgrammeRequest): VerifiedPlan {
-  const strange = [...tasksMissing(plan, request), ...tasksUnknown(plan, request)];
+  const strange = [...tasksMissing(plan, request), ...tasksUnknown(plan, request), ...tasksFar(plan, request)];
   if (strange.length > 0) return { plan: null, broken: strange };
-  const last = plan.tasks.reduce((end, task) => Math.max(end, task.end_minutes), request.start_minutes);
+  const last = plan.tasks.reduce((latest, task) => Math.max(latest, task.start_minutes), request.start_minutes);
   const { network } = networkOf(request, daysUntil(request, last));
   const positions = positionsOf({ request, network }, plan);
   const broken = toldOnce(planBreaches(network, positions).map((breach) => finding(breach, request)));

@@ -141,6 +141,13 @@ describe('A programme', () => {
     expect(await refuse(weekLater)).toContain('Burnish comes too late after Wet and lay: the window has closed.');
     const atOnce = plan.tasks.map((task) => ({ ...task, start_minutes: plan.tasks[0].start_minutes }));
     expect(await refuse(atOnce)).toContain('Gesso 1/4 starts before Size coat lets it.');
+    // A start of the next century holds nobody up, and is refused for what it is.
+    const far = plan.tasks.map((task, place) => (place === 0 ? { ...task, start_minutes: 49_000_000 } : task));
+    const before = process.cpuUsage();
+    expect(await refuse(far)).toEqual([
+      `${request.tasks[0].name} begins more than ten years after the programme does. Please plan it nearer.`,
+    ]);
+    expect(process.cpuUsage(before).user / 1000).toBeLessThan(1000);
     expect((await programmeOf(api.ours, estimateId)).plan).toBeNull();
   });
 

@@ -24,6 +24,7 @@ export const programmeBoard = {
   'programme-breaks-place': '{task} finds no room: {place} is full then.',
   'programme-breaks-lag': '{task} starts before {before} lets it.',
   'programme-breaks-window': '{task} comes too late after {before}: the window has closed.',
+  'programme-breaks-far': '{task} begins more than ten years after the programme does. Please plan it nearer.',
   'programme-breaks-missing': '{task} is not in the plan.',
   'programme-breaks-unknown':
     'The plan holds {tasks, plural, one {a task} other {# tasks}} that are not in the programme any more.',
