@@ -14,6 +14,7 @@ import { MatButton, MatIconButton } from '@angular/material/button';
 import type { AnyDocumentForm } from '../core/forms/document-form';
 import { Icon } from '../ui/icon/icon';
 import { EntryAt, type EntryChoice } from '../ui/field/entry-at';
+import { StepButtons } from '../ui/order/step-buttons';
 import type { ShapeEntry } from './shape-entries';
 
 /** Another kind was chosen for a row. */
@@ -25,7 +26,7 @@ export interface PickedKind {
 /** A small table of entries: rows come, go and change places, by hand or by keys (Alt and the arrows). */
 @Component({
   selector: 'app-rows-editor',
-  imports: [EntryAt, Icon, MatButton, MatIconButton],
+  imports: [EntryAt, Icon, MatButton, MatIconButton, StepButtons],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './rows-editor.html',
   styleUrl: './rows-editor.scss',

@@ -15,6 +15,7 @@ import { EmptyState } from '../ui/page/empty-state';
 import { PageHeader } from '../ui/page/page-header';
 import { SavingIndicator } from '../ui/page/saving-indicator';
 import { Skeleton } from '../ui/page/skeleton';
+import { UndoButtons } from '../ui/page/undo-buttons';
 import { CardConflict } from './card/card-conflict';
 import { CardNameForm } from './card/card-name-form';
 import { CardSaving } from './card/card-saving';
@@ -29,7 +30,7 @@ import { StartCopy } from './start-copy';
   selector: 'app-card-page',
   imports: [
     ...[CardConflict, CardNameForm, CardStateMark, EmptyState, Icon, MatButton, MatIconButton, MatMenuModule],
-    ...[PageHeader, RouterLink, RouterLinkActive, RouterOutlet, SavingIndicator, Skeleton, WorkbookEntry],
+    ...[PageHeader, RouterLink, RouterLinkActive, RouterOutlet, SavingIndicator, Skeleton, UndoButtons, WorkbookEntry],
   ],
   providers: [CardStore, CardSaving],
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -1,4 +1,4 @@
-import { CdkDrag, type CdkDragDrop, CdkDragHandle, CdkDropList } from '@angular/cdk/drag-drop';
+import { CdkDrag, type CdkDragDrop, CdkDropList } from '@angular/cdk/drag-drop';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -9,7 +9,7 @@ import {
   inject,
   input,
 } from '@angular/core';
-import { MatButton, MatIconButton } from '@angular/material/button';
+import { MatButton } from '@angular/material/button';
 import type { Zone } from '#shared/estimates/member';
 import type { ProfileElement } from '#shared/measure/profile-element';
 import { reliefs } from '#shared/measure/relief';
@@ -20,6 +20,8 @@ import { EntryAt } from '../../ui/field/entry-at';
 import type { Explained } from '../../ui/figure/explained';
 import { Figure } from '../../ui/figure/figure';
 import { Icon } from '../../ui/icon/icon';
+import { Grip } from '../../ui/order/grip';
+import { StepButtons } from '../../ui/order/step-buttons';
 import { EstimateStore } from '../estimate-store';
 import type { MemberForm } from '../members/member-form';
 import { MemberSelection } from '../members/member-selection';
@@ -28,7 +30,7 @@ import { newZone } from './new-zone';
 /** The zones of a member: what of its surface each takes, and how deep its relief is. They change places by their grip or by Alt and the arrows. What is laid on it is chosen in Gild. */
 @Component({
   selector: 'app-zone-list',
-  imports: [CdkDrag, CdkDragHandle, CdkDropList, EntryAt, Figure, Icon, MatButton, MatIconButton, PartPicker],
+  imports: [CdkDrag, CdkDropList, EntryAt, Figure, Grip, Icon, MatButton, PartPicker, StepButtons],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './zone-list.html',
   styleUrl: './item-list.scss',

@@ -9,7 +9,7 @@ import { EstimateStore } from '../estimate-store';
 import { copiedMember } from './copied-member';
 import { MemberSelection } from './member-selection';
 import { newMember } from './new-member';
-import { placeBetween } from './place-between';
+import { placeAt, placeBetween } from './place-between';
 
 const contentOf = ({ id: _id, ...content }: Member): MemberContent => content;
 
@@ -93,8 +93,21 @@ export class MemberActions {
   /** To a place in a piece, counted without the member itself. */
   move(member: Member, pieceId: string, index: number): void {
     const others = this.of(pieceId).filter(({ id }) => id !== member.id);
-    const place = placeBetween(others.at(index - 1 < 0 ? others.length : index - 1), others.at(index));
-    this.store.apply([{ kind: 'member', id: member.id, content: { ...contentOf(member), pieceId, place } }]);
+    const content = { ...contentOf(member), pieceId, place: placeAt(others, index) };
+    this.store.apply([{ kind: 'member', id: member.id, content }]);
+  }
+
+  /** One place up or down among the pieces; the members go with it. */
+  shiftPiece(piece: Piece, by: -1 | 1): void {
+    const to = this.store.pieces().findIndex(({ id }) => id === piece.id) + by;
+    if (to >= 0 && to < this.store.pieces().length) this.movePiece(piece, to);
+  }
+
+  /** To a place among the pieces, counted without the piece itself. */
+  movePiece({ id, name, note }: Piece, index: number): void {
+    const others = this.store.pieces().filter((piece) => piece.id !== id);
+    if (this.store.pieces().at(index)?.id === id) return;
+    this.store.apply([{ kind: 'piece', id, content: { name, note, place: placeAt(others, index) } }]);
   }
 
   /** Several new members at the end of a piece, pasted from a spreadsheet. */

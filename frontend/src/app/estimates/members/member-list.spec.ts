@@ -1,5 +1,7 @@
+import { CdkDropList } from '@angular/cdk/drag-drop';
 import { type ComponentFixture, TestBed } from '@angular/core/testing';
 import { MatDialog } from '@angular/material/dialog';
+import { By } from '@angular/platform-browser';
 import { ActivatedRoute, convertToParamMap, provideRouter } from '@angular/router';
 import { of } from 'rxjs';
 import { shapeDefaults } from '#shared/measure/shape-defaults';
@@ -106,6 +108,74 @@ describe('MemberList', () => {
     ]);
   });
 
+  describe('with two pieces', () => {
+    const plinth = '018f0000-0000-7000-8000-000000000166';
+    const heads = () => text('.piece h3');
+    const moreOf = (pieceId: string) => element().querySelector<HTMLElement>(`[data-piece="${pieceId}"]`);
+    /** What the pointer does in a browser; how it does it is looked at there (test/journeys). */
+    const drop = async (from: number, to: number) => {
+      const list = fixture.debugElement.query(By.directive(CdkDropList)).injector.get(CdkDropList);
+      list.dropped.emit({ item: list.getSortedItems()[from], previousIndex: from, currentIndex: to } as never);
+      await settle();
+    };
+    beforeEach(async () => {
+      server.pieces.push({ id: plinth, version: 1, content: { name: 'Plinth', place: 5, note: 'oak' } });
+      await open();
+    });
+
+    it('puts a piece with its members where it is dropped, in one step that can be taken back', async () => {
+      await drop(1, 0);
+      expect(heads()).toEqual(['Plinth', 'Base']);
+      expect(store.members().map(({ id, pieceId }) => [id, pieceId])).toEqual([
+        [ids.edge, ids.piece],
+        [ids.leg, ids.piece],
+      ]);
+      await jest.advanceTimersByTimeAsync(700);
+      expect(server.arrived).toHaveLength(1);
+      expect(server.pieces.find(({ id }) => id === plinth)?.content).toEqual({
+        name: 'Plinth',
+        note: 'oak',
+        place: expect.any(Number),
+      });
+      store.undo();
+      await settle();
+      expect(heads()).toEqual(['Base', 'Plinth']);
+    });
+
+    it('makes no step of a piece that is let go where it was', async () => {
+      await drop(0, 0);
+      expect([heads(), store.canUndo()]).toEqual([['Base', 'Plinth'], false]);
+    });
+
+    it('moves a piece with Alt and the arrows, stays at its button, and stops at the ends', async () => {
+      const press = async (key: string) => {
+        moreOf(ids.piece)?.focus();
+        moreOf(ids.piece)?.dispatchEvent(new KeyboardEvent('keydown', { key, altKey: true, bubbles: true }));
+        await settle();
+        return [heads(), (document.activeElement as HTMLElement).dataset['piece']];
+      };
+      expect(await press('ArrowDown')).toEqual([['Plinth', 'Base'], ids.piece]);
+      expect(await press('ArrowDown')).toEqual([['Plinth', 'Base'], ids.piece]);
+      expect(await press('ArrowUp')).toEqual([['Base', 'Plinth'], ids.piece]);
+    });
+
+    it('moves a piece by its menu, for fingers', async () => {
+      moreOf(plinth)?.click();
+      await settle();
+      const items = [...document.querySelectorAll<HTMLButtonElement>('.mat-mdc-menu-panel button')];
+      items.find((one) => one.textContent?.trim() === 'Move up')?.click();
+      await settle();
+      expect(heads()).toEqual(['Plinth', 'Base']);
+    });
+  });
+
+  it('takes hold of no piece while there is only one', async () => {
+    await open();
+    expect(element().querySelectorAll('.piece-head .grip')).toHaveLength(0);
+    const [piece] = fixture.debugElement.query(By.directive(CdkDropList)).injector.get(CdkDropList).getSortedItems();
+    expect(piece.disabled).toBe(true);
+  });
+
   it('adds a member of the shape one chooses, at the end and of the same timber', async () => {
     await open();
     jest.spyOn(TestBed.inject(MatDialog), 'open').mockReturnValue({ afterClosed: () => of('bun-foot') } as never);
@@ -162,6 +232,7 @@ describe('MemberList', () => {
     await press(ids.leg, 'Delete');
     await press(ids.leg, 'ArrowUp', { altKey: true });
     expect(text('.name')).toEqual(['Top edge', 'Leg']);
+    expect(element().querySelectorAll('.grip, [data-piece]')).toHaveLength(0);
     expect(element().textContent).not.toContain('Add a member');
   });
 });

@@ -1,4 +1,4 @@
-import { CdkDrag, type CdkDragDrop, CdkDragHandle, CdkDropList, CdkDropListGroup } from '@angular/cdk/drag-drop';
+import { CdkDrag, type CdkDragDrop, CdkDragPreview, CdkDropList, CdkDropListGroup } from '@angular/cdk/drag-drop';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -13,19 +13,23 @@ import { MatMenu, MatMenuContent, MatMenuItem, MatMenuTrigger } from '@angular/m
 import type { Member, Piece } from '#shared/estimates/member';
 import { ShapeGlyph } from '../../measure';
 import { Icon } from '../../ui/icon/icon';
+import { Grip } from '../../ui/order/grip';
 import { EstimateStore } from '../estimate-store';
 import { MemberActions } from './member-actions';
 import { MemberRows } from './member-row';
 import { MemberSelection } from './member-selection';
+
+const arrows: Readonly<Partial<Record<string, -1 | 1>>> = { ArrowUp: -1, ArrowDown: 1 };
 
 /** The members of the estimate, piece by piece: one chooses, adds, moves, doubles and removes them here. */
 @Component({
   selector: 'app-member-list',
   imports: [
     CdkDrag,
-    CdkDragHandle,
+    CdkDragPreview,
     CdkDropList,
     CdkDropListGroup,
+    Grip,
     Icon,
     MatButton,
     MatIconButton,
@@ -61,16 +65,33 @@ export class MemberList {
     this.actions.move(event.item.data, event.container.data.id, event.currentIndex);
   }
 
+  protected dropPiece({ item, currentIndex }: CdkDragDrop<unknown, unknown, Piece>): void {
+    this.actions.movePiece(item.data, currentIndex);
+  }
+
+  /** Alt and an arrow move a piece with its members; one stays at its button. */
+  protected pressPiece(event: KeyboardEvent, piece: Piece): void {
+    const by = arrows[event.key];
+    if (!by || !event.altKey) return;
+    event.preventDefault();
+    this.shiftPiece(piece, by);
+  }
+
+  protected shiftPiece(piece: Piece, by: -1 | 1): void {
+    this.actions.shiftPiece(piece, by);
+    this.focus(() => `[data-piece="${piece.id}"]`);
+  }
+
   /** Alt and an arrow move a member, arrows alone go to the next one. */
   protected press(event: KeyboardEvent, member: Member): void {
-    const by = { ArrowUp: -1, ArrowDown: 1 }[event.key] as -1 | 1 | undefined;
+    const by = arrows[event.key];
     if (by) {
       if (event.altKey) this.shift(member, by);
       else this.focusBeside(event, by);
       event.preventDefault();
     } else if (event.key === 'Delete' && this.store.mayEdit()) {
       this.actions.remove(member);
-      this.focus(() => this.selection.member()?.id);
+      this.focus(() => `[data-member="${this.selection.member()?.id ?? ''}"]`);
     }
   }
 
@@ -101,11 +122,11 @@ export class MemberList {
   private shift(member: Member, by: -1 | 1): void {
     if (!this.store.mayEdit()) return;
     this.actions.shift(member, by);
-    this.focus(() => member.id);
+    this.focus(() => `[data-member="${member.id}"]`);
   }
 
-  private focus(id: () => string | undefined): void {
-    const focus = () => this.host.nativeElement.querySelector<HTMLElement>(`[data-member="${id() ?? ''}"]`)?.focus();
+  private focus(selector: () => string): void {
+    const focus = () => this.host.nativeElement.querySelector<HTMLElement>(selector())?.focus();
     afterNextRender(focus, { injector: this.injector });
   }
 

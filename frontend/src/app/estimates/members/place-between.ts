@@ -10,3 +10,7 @@ export function placeBetween(before: Placed | undefined, after: Placed | undefin
   if (before) return before.place + step;
   return after ? after.place - step : 0;
 }
+
+/** The place at an index among others, counted without what is put there. */
+export const placeAt = (others: readonly Placed[], index: number): number =>
+  placeBetween(index > 0 ? others.at(index - 1) : undefined, others.at(index));

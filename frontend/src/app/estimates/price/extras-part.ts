@@ -1,8 +1,9 @@
 import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
-import { MatButton, MatIconButton } from '@angular/material/button';
+import { MatButton } from '@angular/material/button';
 import { Formats } from '../../core/formats/formats';
 import { Notices } from '../../core/problems/notices';
 import { Icon } from '../../ui/icon/icon';
+import { StepButtons } from '../../ui/order/step-buttons';
 import { EmptyState } from '../../ui/page/empty-state';
 import { FindingList } from '../../ui/page/finding-list';
 import { FigureTable } from '../../ui/table/figure-table';
@@ -17,7 +18,7 @@ import { usualExtras, type UsualExtra } from './usual-extras';
 /** Further lines: work and goods no member carries, added from the card with one press and entered in a dense table. */
 @Component({
   selector: 'app-extras-part',
-  imports: [EmptyState, ExtraLineForm, FigureTable, FindingList, Icon, MatButton, MatIconButton],
+  imports: [EmptyState, ExtraLineForm, FigureTable, FindingList, Icon, MatButton, StepButtons],
   changeDetection: ChangeDetectionStrategy.OnPush,
   providers: [ExtraLinesStore],
   templateUrl: './extras-part.html',

@@ -8,16 +8,16 @@ import {
   input,
   type OnInit,
 } from '@angular/core';
-import { MatButton, MatIconButton } from '@angular/material/button';
+import { MatButton } from '@angular/material/button';
 import { RouterLink, RouterOutlet } from '@angular/router';
 import { issueLetter } from '#shared/estimates/issue-letter';
 import { PageTitle } from '../../core/routing/page-title';
-import { Icon } from '../../ui/icon/icon';
 import { EmptyState } from '../../ui/page/empty-state';
 import { PageHeader } from '../../ui/page/page-header';
 import { SavingIndicator } from '../../ui/page/saving-indicator';
 import { Skeleton } from '../../ui/page/skeleton';
 import { TallyBar } from '../../ui/page/tally-bar';
+import { UndoButtons } from '../../ui/page/undo-buttons';
 import { EstimateStore, type OpenEstimate } from '../estimate-store';
 import { MemberSelection } from '../members/member-selection';
 import { EstimateTally } from './estimate-tally';
@@ -31,15 +31,14 @@ const longestWait_ms = 2000;
   selector: 'app-workspace',
   imports: [
     EmptyState,
-    Icon,
     MatButton,
-    MatIconButton,
     PageHeader,
     RouterLink,
     RouterOutlet,
     SavingIndicator,
     Skeleton,
     TallyBar,
+    UndoButtons,
     WorkspaceNews,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,

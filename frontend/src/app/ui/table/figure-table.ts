@@ -1,4 +1,4 @@
-import { CdkDrag, type CdkDragDrop, CdkDragHandle, CdkDropList } from '@angular/cdk/drag-drop';
+import { CdkDrag, type CdkDragDrop, CdkDropList } from '@angular/cdk/drag-drop';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -17,7 +17,7 @@ import { decimalSign } from '#shared/units/decimal-sign';
 import { ungrouped } from '#shared/units/ungrouped';
 import { Formats } from '../../core/formats/formats';
 import { Figure } from '../figure/figure';
-import { Icon } from '../icon/icon';
+import { Grip } from '../order/grip';
 import type { EditedCell, FigureColumn, MovedRow, PastedCells } from './figure-column';
 import { ghostFractions } from './ghost-fraction';
 import { placeAfter, type GridPlace } from './grid-place';
@@ -26,7 +26,7 @@ import { pastedLines } from './pasted-lines';
 /** A dense table of figures: arrow keys move, Enter or typing edits a cell, rows of a spreadsheet can be pasted at one; rows change places by their grip or by Alt and the arrows. */
 @Component({
   selector: 'app-figure-table',
-  imports: [CdkDrag, CdkDragHandle, CdkDropList, Figure, Icon],
+  imports: [CdkDrag, CdkDropList, Figure, Grip],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './figure-table.html',
   styleUrl: './figure-table.scss',
