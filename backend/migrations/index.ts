@@ -11,6 +11,7 @@ import { variations } from './0031-variations';
 import { agreements } from './0040-agreements';
 import { programme } from './0045-programme';
 import { invoices } from './0050-invoices';
+import { takenBack } from './0051-taken-back';
 
 /** Every step of the schema, in the order in which they are taken. A step that was released is never changed. */
 export const migrations: readonly Migration[] = [
@@ -26,4 +27,5 @@ export const migrations: readonly Migration[] = [
   agreements,
   programme,
   invoices,
+  takenBack,
 ];

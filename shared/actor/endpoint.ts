@@ -33,6 +33,8 @@ export interface Endpoint {
   readonly versioned?: boolean;
   /** How many are served at once, where the work is costly; the others wait their turn before anything is taken for them. */
   readonly atOnce?: number;
+  /** It takes steps that are each a transaction of their own, and holds nothing while it asks a service outside between them. */
+  readonly inSteps?: boolean;
 }
 
 /** Declares an endpoint, keeping the exact types of its parts. */

@@ -52,6 +52,7 @@ export const beginClientCheckout = endpoint({
   path: '/api/client/invoices/:invoiceId/checkouts',
   callers: 'client',
   params: oneInvoice,
+  inSteps: true,
   answers: { public: checkoutSchema },
 });
 
@@ -62,5 +63,6 @@ export const askClientCheckout = endpoint({
   path: '/api/client/checkouts/:checkoutId/state',
   callers: 'client',
   params: z.strictObject({ checkoutId: identifier }),
+  inSteps: true,
   answers: { public: checkoutSchema },
 });

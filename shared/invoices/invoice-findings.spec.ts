@@ -55,6 +55,16 @@ it('finds nothing to say of an ordinary invoice', () => {
   expect(codes(hand())).toEqual([]);
 });
 
+it('warns of letters the paper cannot print, each by the text it stands in', () => {
+  const buyer = { ...content({}).buyer, contact: 'דוד' };
+  const foreign = { ...line('S', '20'), description: '金箔' };
+  const told = invoiceFindings(hand({ buyer, lines: [foreign], terms: 'Vierzehn Tage, 14 дней' }));
+  expect(told.map(({ kind, code, values }) => [kind, code, values])).toEqual([
+    ['warn', 'letters-not-printed', { part: 'buyer', name: '', letters: 'ד ו', more: 0 }],
+    ['warn', 'letters-not-printed', { part: 'line', name: 'Gilding', letters: '金 箔', more: 0 }],
+  ]);
+});
+
 // Rules of EN 16931 (ConnectingEurope/eInvoicing-EN16931, release validation-1.3.16), by their names.
 it.each<[string, InvoiceInHand, string]>([
   ['BR-16: no line', hand({ lines: [] }), 'refuse invoice-no-lines'],

@@ -1,8 +1,10 @@
 import { compareDays } from '#shared/calendar/add-days';
 import { exchangeFindings } from '#shared/invoices/exchange-findings';
 import { when, type InvoiceInHand } from '#shared/invoices/invoice-in-hand';
+import { invoiceTexts } from '#shared/invoices/invoice-texts';
 import { taxFindings } from '#shared/invoices/tax-findings';
 import type { Finding } from '#shared/words/finding';
+import { letterFindings } from '#shared/words/letter-findings';
 
 /** EN 16931: BR-16 (lines), BR-07 and BR-11 (buyer), BR-CO-26 (seller). */
 function partyFindings({ content, seller }: InvoiceInHand): Finding[] {
@@ -37,4 +39,5 @@ export const invoiceFindings = (hand: InvoiceInHand): Finding[] => [
   ...dueFindings(hand),
   ...taxFindings(hand),
   ...exchangeFindings(hand),
+  ...letterFindings(invoiceTexts(hand)),
 ];

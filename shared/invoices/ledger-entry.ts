@@ -2,12 +2,12 @@ import type { Day } from '#shared/calendar/day';
 import type { MinorUnits } from '#shared/money/decimal';
 
 /** What moves the account of a client. */
-export const ledgerKinds = ['invoice', 'credit-note', 'payment', 'refund', 'write-off'] as const;
+export const ledgerKinds = ['invoice', 'credit-note', 'payment', 'refund', 'dispute', 'write-off'] as const;
 export type LedgerKind = (typeof ledgerKinds)[number];
 
 /**
  * One movement on a client's account, in whole minor units: what an invoice or refund adds to what is owed is above nothing, what a
- * credit note, a payment or a write-off takes off is below. Net, tax and rounding are 0 for what is no paper with tax.
+ * credit note, a payment or a write-off takes off is below; what a bank takes back in a dispute is above, what it gives back below. Net, tax and rounding are 0 for what is no paper with tax.
  */
 export interface LedgerEntry {
   readonly id: string;

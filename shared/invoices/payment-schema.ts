@@ -11,6 +11,10 @@ import { day, identifier, line, optionalLine, paragraphs } from '#shared/problem
 export const paymentWays = ['bank', 'cash', 'card'] as const;
 export type PaymentWay = (typeof paymentWays)[number];
 
+/** What a row of money is: one that failed is money back from a refund, a dispute what a bank took back, or gave back. */
+export const paymentDeeds = ['payment', 'refund', 'refund-failed', 'dispute'] as const;
+export type PaymentDeed = (typeof paymentDeeds)[number];
+
 const shareSchema = z.strictObject({ invoiceId: identifier, amount_minor: amountEntry });
 
 function sharesAreUnique(shares: readonly { readonly invoiceId?: unknown }[], context: z.core.$RefinementCtx): void {
@@ -53,9 +57,10 @@ export const paymentSchema = z.strictObject({
   id: z.uuid(),
   clientId: z.uuid(),
   clientName: z.string(),
+  deed: z.enum(paymentDeeds),
   way: z.enum(paymentWays),
   currency: z.string(),
-  /** Below nothing for a refund. */
+  /** Below nothing for what went back. */
   amount_minor: z.int(),
   /** What no invoice has taken yet: it lies here to the client's credit. */
   credit_minor: z.int(),

@@ -81,6 +81,7 @@ export const askCheckout = endpoint({
   path: '/api/checkouts/:checkoutId/state',
   callers: ['owner', 'office'],
   params: z.strictObject({ checkoutId: identifier }),
+  inSteps: true,
   answers: sameForPriced(checkoutSchema),
 });
 
@@ -91,6 +92,7 @@ export const takePaymentEvent = endpoint({
   path: '/api/payment-events',
   callers: 'anyone',
   signature: 'stripe-signature',
+  inSteps: true,
   answers: {},
 });
 

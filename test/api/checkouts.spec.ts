@@ -7,7 +7,7 @@ import {
   beginClientCheckout,
   listClientInvoices,
 } from '#shared/client-page/client-invoices-endpoints';
-import type { Checkout, Payment } from '#shared/invoices/payment-schema';
+import type { Checkout, Journal, Payment } from '#shared/invoices/payment-schema';
 import {
   askCheckout,
   listPayments,
@@ -15,7 +15,7 @@ import {
   refundPayment,
   takePaymentEvent,
 } from '#shared/invoices/payments-endpoints';
-import { readOwed } from '#shared/invoices/owed-endpoints';
+import { readJournal, readOwed } from '#shared/invoices/owed-endpoints';
 import { ledgerFaults } from './ledger';
 import { acceptedIssue } from './sample-client-visit';
 import { paymentOf, readBack, sampleInvoice, stageInvoice } from './sample-invoice';
@@ -40,9 +40,7 @@ const post = ({ bytes, signature }: Signed) => {
 async function begun(sample?: { clientId: string; invoiceId: string }) {
   const { invoiceId, clientId } = sample ?? (await sampleInvoice(api.ours));
   const payer = { accessId: newId(), name: 'Payer', email: '', returnUrl: () => 'http://127.0.0.1/back' };
-  const row = await api.platform.database.transaction(() =>
-    api.app.invoices.checkouts.begin(api.ours.id, invoiceId, payer),
-  );
+  const row = await api.app.invoices.checkouts.begin(api.ours.id, invoiceId, payer);
   return { invoiceId, clientId, checkoutId: row.id, sessionId: row.sessionId ?? '', url: row.url ?? '' };
 }
 
@@ -51,6 +49,7 @@ const ask = async (checkoutId: string): Promise<Checkout> =>
 const openOf = async (invoiceId: string) => (await readBack(api.ours, invoiceId)).open_minor;
 const paymentsOf = async (clientId: string): Promise<Payment[]> =>
   ((await api.as('office').call(listPayments, { query: { clientId } })).body as { items: Payment[] }).items;
+const entriesOf = (journal: unknown) => (journal as Journal).entries;
 const rowsOf = async () => {
   const [row] = await api.platform.database.select<{ events: number; payments: number }>(
     'SELECT (SELECT COUNT(*) FROM payment_events) AS events, (SELECT COUNT(*) FROM payments) AS payments',
@@ -204,7 +203,217 @@ describe('a payment by card', () => {
   });
 });
 
+/** A payment over the whole of an invoice, and the amounts of every row of money of its client, the newest first. */
+async function paid() {
+  const sample = await begun();
+  const { payment_intent: intentId } = await api.standIn.pay(sample.sessionId);
+  const amounts = async () => (await paymentsOf(sample.clientId)).map(({ deed, amount_minor }) => [deed, amount_minor]);
+  return { ...sample, intentId: intentId ?? '', amounts };
+}
+
+describe('a payment that a bank takes back', () => {
+  it('leaves its invoice open again, once however often and in whatever words it is told', async () => {
+    const { intentId, invoiceId, amounts } = await paid();
+    const dispute = await api.standIn.dispute(intentId);
+    expect(await openOf(invoiceId)).toBe(12_000);
+    for (const kind of ['charge.dispute.created', 'charge.dispute.updated'])
+      expect((await post(api.standIn.signed(kind, dispute))).status).toBe(204);
+    expect(await amounts()).toEqual([
+      ['dispute', -12_000],
+      ['payment', 12_000],
+    ]);
+    await api.standIn.closeDispute(dispute.id, 'lost');
+    expect(await openOf(invoiceId)).toBe(12_000);
+    expect((await amounts()).length).toBe(2);
+  });
+
+  it('settles it again where the dispute is won, and stands so in the journal', async () => {
+    const { intentId, invoiceId, clientId, amounts } = await paid();
+    const { id } = await api.standIn.dispute(intentId, { amount: 5_000 });
+    expect(await openOf(invoiceId)).toBe(5_000);
+    await api.standIn.closeDispute(id, 'won');
+    expect(await openOf(invoiceId)).toBe(0);
+    expect(await amounts()).toEqual([
+      ['dispute', 5_000],
+      ['dispute', -5_000],
+      ['payment', 12_000],
+    ]);
+    const query = { from: '2000-01-01', to: '2199-12-31' };
+    const journal = await api.as('office').call(readJournal, { query });
+    const own = entriesOf(journal.body).filter((entry) => entry.clientId === clientId && entry.kind === 'dispute');
+    expect(own.map(({ amount_minor }) => amount_minor).sort((one, other) => one - other)).toEqual([-5_000, 5_000]);
+  });
+
+  it('ends where the service says, though the end is told before the beginning and the payment last of all', async () => {
+    const sample = await begun();
+    const session = await api.standIn.pay(sample.sessionId, false);
+    const dispute = api.standIn.ledger.dispute(session.payment_intent ?? '');
+    // Nobody here knows the payment yet, so this one is kept as unknown; what it told is found with the payment itself.
+    expect((await post(api.standIn.signed('charge.dispute.created', dispute))).status).toBe(204);
+    expect((await post(api.standIn.signed('checkout.session.completed', session))).status).toBe(204);
+    expect(await openOf(sample.invoiceId)).toBe(12_000);
+    const won = api.standIn.ledger.changeDispute(dispute.id, 'won');
+    await Promise.all(
+      ['charge.dispute.closed', 'charge.dispute.funds_reinstated', 'charge.dispute.updated'].map((kind) =>
+        post(api.standIn.signed(kind, won)),
+      ),
+    );
+    await post(api.standIn.signed('charge.dispute.created', dispute));
+    expect(await openOf(sample.invoiceId)).toBe(0);
+    expect((await paymentsOf(sample.clientId)).map(({ amount_minor }) => amount_minor)).toEqual([
+      12_000, -12_000, 12_000,
+    ]);
+  });
+
+  it('stays where the bank only asks, and no more is taken than is left after a refund', async () => {
+    const { intentId, invoiceId, clientId } = await paid();
+    await api.standIn.dispute(intentId, { status: 'warning_needs_response' });
+    expect(await openOf(invoiceId)).toBe(0);
+    const [payment] = await paymentsOf(clientId);
+    const refund = { refundId: newId(), amount_minor: 2_000, reference: '', reopens: true };
+    const body = { ...refund, refundedOn: payment.receivedOn };
+    await api.as('office').call(refundPayment, { params: { paymentId: payment.id }, body, key: randomUUID() });
+    await api.standIn.quiet();
+    await api.standIn.dispute(intentId, { currency: 'usd', amount: 13_100 });
+    expect(await openOf(invoiceId)).toBe(12_000);
+    expect((await paymentsOf(clientId)).map(({ amount_minor }) => amount_minor)).toEqual([-10_000, -2_000, 12_000]);
+  });
+});
+
+describe('a refund', () => {
+  const refundOf = async (clientId: string, amount_minor: number) => {
+    const [payment] = (await paymentsOf(clientId)).filter(({ deed }) => deed === 'payment');
+    const body = { refundId: newId(), amount_minor, refundedOn: payment.receivedOn, reference: '', reopens: true };
+    const refund = () =>
+      api.as('office').call(refundPayment, { params: { paymentId: payment.id }, body, key: randomUUID() });
+    return { refund, payment };
+  };
+
+  it('that fails days later is money back here, and its invoice is settled again', async () => {
+    const { clientId, invoiceId, intentId, amounts } = await paid();
+    await (await refundOf(clientId, 4_000)).refund();
+    await api.standIn.quiet();
+    expect(await openOf(invoiceId)).toBe(4_000);
+    const [refund] = api.standIn.ledger.refundsOf(intentId);
+    await api.standIn.failRefund(refund.id);
+    expect(await openOf(invoiceId)).toBe(0);
+    expect(await amounts()).toEqual([
+      ['refund-failed', 4_000],
+      ['refund', -4_000],
+      ['payment', 12_000],
+    ]);
+    const again = await (await refundOf(clientId, 12_000)).refund();
+    expect([again.status, await openOf(invoiceId)]).toEqual([200, 12_000]);
+  });
+
+  it('that the service refuses at once is refused here, and nothing moved', async () => {
+    const { clientId, invoiceId } = await paid();
+    const { refund } = await refundOf(clientId, 4_000);
+    const made = jest.spyOn(api.standIn.ledger, 'refund').mockImplementationOnce((fields) => {
+      made.mockRestore();
+      const { id } = api.standIn.ledger.refund(fields);
+      return api.standIn.ledger.changeRefund(id, 'failed');
+    });
+    const refused = await refund();
+    expect([refused.status, (refused.body as { type: string }).type]).toEqual([409, 'urn:problem:refund-failed']);
+    await api.standIn.quiet();
+    expect(await openOf(invoiceId)).toBe(0);
+    expect(await paymentsOf(clientId)).toHaveLength(1);
+  });
+});
+
+describe('while the payment service is asked', () => {
+  /** Lets the service answer only once this is let go; tells when it has been asked. */
+  function slowly(method: 'begin' | 'refund') {
+    let letGo: () => void = () => undefined;
+    const held = new Promise<void>((resolve) => (letGo = resolve));
+    let isAsked: () => void = () => undefined;
+    const asked = new Promise<void>((resolve) => (isAsked = resolve));
+    const { cards } = api.platform;
+    const real = cards[method].bind(cards) as (order: never) => Promise<never>;
+    const spy = jest.spyOn(cards, method).mockImplementation(async (order: object) => {
+      isAsked();
+      await held;
+      return real(order as never);
+    });
+    return { asked, letGo, restore: () => spy.mockRestore() };
+  }
+
+  const cash = async (sample: { clientId: string; invoiceId: string }, amount_minor: number) => {
+    const body = await paymentOf(api.ours, api, { ...sample, amount_minor });
+    return (await api.as('office').call(recordPayment, { body, key: randomUUID() })).status;
+  };
+
+  it('nobody waits who moves money of the same workshop', async () => {
+    const sample = await sampleInvoice(api.ours);
+    const other = await sampleInvoice(api.ours);
+    const { asked, letGo, restore } = slowly('begin');
+    const beginning = begun(sample);
+    await asked;
+    expect(await cash(other, 1_000)).toBe(200);
+    letGo();
+    expect((await beginning).sessionId).toMatch(/^cs_/);
+    restore();
+  });
+
+  it('nor while it gives back', async () => {
+    const { clientId } = await paid();
+    const other = await sampleInvoice(api.ours);
+    const [payment] = await paymentsOf(clientId);
+    const { asked, letGo, restore } = slowly('refund');
+    const body = { refundId: newId(), amount_minor: 100, refundedOn: payment.receivedOn, reference: '', reopens: true };
+    // Sent only once somebody waits for it.
+    const refunding = (async () =>
+      api.as('office').call(refundPayment, { params: { paymentId: payment.id }, body, key: randomUUID() }))();
+    await asked;
+    expect(await cash(other, 1_000)).toBe(200);
+    letGo();
+    expect((await refunding).status).toBe(200);
+    await api.standIn.quiet();
+    restore();
+  });
+
+  it('two who begin at once are led to one page', async () => {
+    const sample = await sampleInvoice(api.ours);
+    const pages = await Promise.all(Array.from({ length: 8 }, () => begun(sample)));
+    expect(new Set(pages.map(({ sessionId }) => sessionId)).size).toBe(1);
+    expect(new Set(pages.map(({ checkoutId }) => checkoutId)).size).toBe(1);
+  });
+
+  it('a server that stops leaves what the next one goes on with, and two payers of one invoice get one page', async () => {
+    const sample = await sampleInvoice(api.ours);
+    const { cards } = api.platform;
+    const real = cards.begin.bind(cards);
+    const lost = jest.spyOn(cards, 'begin').mockImplementationOnce(async (order) => {
+      await real(order);
+      throw new Error('the answer was lost with the server');
+    });
+    await expect(begun(sample)).rejects.toMatchObject({ code: 'checkout-unreachable' });
+    lost.mockRestore();
+    const healed = await begun(sample);
+    const rows = await api.platform.database.select<{ id: string }>(
+      'SELECT id FROM checkouts WHERE invoice_id = :invoiceId',
+      { invoiceId: sample.invoiceId },
+    );
+    expect(rows.map(({ id }) => id)).toEqual([healed.checkoutId]);
+    await api.standIn.pay(healed.sessionId);
+    expect(await openOf(sample.invoiceId)).toBe(0);
+  });
+});
+
 describe('an event', () => {
+  it('that could not be followed is taken when it comes again', async () => {
+    const { sessionId, invoiceId } = await begun();
+    const session = await api.standIn.pay(sessionId, false);
+    const event = api.standIn.signed('checkout.session.completed', session);
+    const away = jest.spyOn(api.platform.cards, 'state').mockRejectedValueOnce(new Error('away'));
+    expect((await post(event)).status).toBe(503);
+    away.mockRestore();
+    expect(await openOf(invoiceId)).toBe(12_000);
+    expect((await post(event)).status).toBe(204);
+    expect(await openOf(invoiceId)).toBe(0);
+  });
+
   const seconds = (instant: Date) => Math.floor(instant.getTime() / 1_000);
 
   async function bent(): Promise<[string, Signed][]> {

@@ -27,20 +27,24 @@ export class CheckoutRepository extends WorkshopRows<CheckoutRow> {
     return this.found('id = :name', id);
   }
 
-  /** Whether an event is new; one who tells of it at the same moment is waited for. */
-  async isNew(event: { id: string; kind: string; content: string; receivedAt: Date }): Promise<boolean> {
-    const written = await this.database.execute(
-      `INSERT IGNORE INTO payment_events (id, kind, content, received_at) VALUES (:id, :kind, :content, :receivedAt)`,
-      event,
-    );
-    return written === 1;
+  async isKnown(eventId: string): Promise<boolean> {
+    const rows = await this.database.select('SELECT id FROM payment_events WHERE id = :eventId', { eventId });
+    return rows.length > 0;
   }
 
-  async nameEvent(id: string, checkoutId: string): Promise<void> {
-    await this.database.execute('UPDATE payment_events SET checkout_id = :checkoutId WHERE id = :id', {
-      id,
-      checkoutId,
-    });
+  /** Notes an event, once. */
+  async keepEvent(event: {
+    readonly id: string;
+    readonly kind: string;
+    readonly content: string;
+    readonly receivedAt: Date;
+    readonly checkoutId: string | null;
+  }): Promise<void> {
+    await this.database.execute(
+      `INSERT IGNORE INTO payment_events (id, kind, content, received_at, checkout_id)
+       VALUES (:id, :kind, :content, :receivedAt, :checkoutId)`,
+      event,
+    );
   }
 
   /** Only the service's name of an event, its kind and when it came: what it holds may be anybody's. */

@@ -6,6 +6,7 @@ import { ownOrigin } from '../platform/config/own-origin';
 import { WorkshopRows } from '../platform/database/workshop-rows';
 import type { Route } from '../platform/http/mount';
 import type { Platform } from '../platform/platform';
+import { CheckoutEntering } from './checkout-entering';
 import { CheckoutRepository } from './checkout-repository';
 import { CheckoutService } from './checkout-service';
 import { DraftService } from './draft-service';
@@ -21,6 +22,7 @@ import { IssuingService } from './issuing-service';
 import { LedgerPapers } from './ledger-papers';
 import { LedgerService } from './ledger-service';
 import { reminderTable } from './payment-model';
+import { MoneyBackService } from './money-back-service';
 import { PaymentRepository } from './payment-repository';
 import { paymentRoutes } from './payment-routes';
 import { PaymentService } from './payment-service';
@@ -84,11 +86,10 @@ export function openInvoices(platform: Platform, needs: InvoicesNeeds): Invoices
   const letters = new InvoiceLetters({ ...parts, reminders: new WorkshopRows(reminderTable(database)) });
   const recording = new PaymentService({ ...parts, settling });
   const rows = new CheckoutRepository(database);
-  const refunds = new RefundService({ ...parts, recording, settling, cards, checkouts: rows });
-  const checkouts = new CheckoutService({
-    ...parts,
-    ...{ database, checkouts: rows, cards, recording, refunds, settling, letters },
-  });
+  const moneyBack = new MoneyBackService({ ...parts, recording, settling });
+  const refunds = new RefundService({ ...parts, moneyBack, cards });
+  const entering = new CheckoutEntering({ ...parts, checkouts: rows, recording, moneyBack, settling, letters });
+  const checkouts = new CheckoutService({ ...parts, database, checkouts: rows, cards, entering });
   const statements = new LedgerPapers(parts, ledger);
   const routes = [
     ...invoiceRoutes({ drafts, stages, issuing, reading, settings: parts.settings, letters }),

@@ -61,6 +61,7 @@ export const presentPayment = (
   id: row.id,
   clientId: row.clientId,
   clientName,
+  deed: row.deed ?? (row.refundsPaymentId === null ? 'payment' : 'refund'),
   way: row.way,
   currency: row.currency,
   amount_minor: row.amountMinor,

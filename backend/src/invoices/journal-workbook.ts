@@ -11,6 +11,7 @@ const kindWords = {
   'credit-note': 'journal-kind-credit-note',
   payment: 'journal-kind-payment',
   refund: 'journal-kind-refund',
+  dispute: 'journal-kind-dispute',
   'write-off': 'journal-kind-write-off',
 } as const;
 

@@ -31,8 +31,14 @@ function ofInvoice(row: InvoiceRow, names: Named): LedgerEntry {
   };
 }
 
+/** A refund that failed stands among the refunds, below nothing: so their sum is what was really given back. */
+function kindOf({ deed, refundsPaymentId }: PaymentRow): LedgerEntry['kind'] {
+  if (deed === 'dispute') return 'dispute';
+  return refundsPaymentId === null ? 'payment' : 'refund';
+}
+
 const ofPayment = (row: PaymentRow, names: Named): LedgerEntry => ({
-  ...{ id: row.id, day: row.receivedOn, kind: row.amountMinor < 0 ? 'refund' : 'payment', number: row.reference },
+  ...{ id: row.id, day: row.receivedOn, kind: kindOf(row), number: row.reference },
   ...{ clientId: row.clientId, clientName: names.get(row.clientId) ?? '' },
   ...noTax,
   amount_minor: -row.amountMinor,

@@ -3,6 +3,9 @@ import { column } from '../platform/database/columns';
 import type { Database } from '../platform/database/database';
 import type { WorkshopRow } from '../platform/database/workshop-rows';
 
+/** Of a payment by card: a refund that came back to us, or what a dispute took (below nothing) and gave back. */
+export type OutsideDeed = 'refund-failed' | 'dispute';
+
 /** Money that came, or went back (below nothing); only what no invoice has taken of it is ever written again. */
 export interface PaymentRow extends WorkshopRow {
   readonly clientId: string;
@@ -15,6 +18,9 @@ export interface PaymentRow extends WorkshopRow {
   readonly refundsPaymentId: string | null;
   /** What the payment service calls it, where it came through one. */
   readonly externalId: string | null;
+  readonly deed: OutsideDeed | null;
+  /** The refund or dispute of the payment service that this row follows. */
+  readonly follows: string | null;
   readonly recordedAt: Date;
   readonly recordedBy: string;
 }
@@ -47,6 +53,8 @@ export interface CheckoutRow extends WorkshopRow {
   readonly sessionId: string | null;
   readonly url: string | null;
   readonly intentId: string | null;
+  /** Raised by whatever changes it or its payment: an answer asked for before is not taken after. */
+  readonly turn: number;
   readonly createdAt: Date;
 }
 
@@ -72,6 +80,8 @@ export const paymentTable = (database: Database) =>
     reference: column.word,
     refundsPaymentId: column.reference,
     externalId: column.word,
+    deed: column.word,
+    follows: column.word,
     recordedAt: column.instant,
     recordedBy: column.word,
   });
@@ -107,6 +117,7 @@ export const checkoutTable = (database: Database) =>
     sessionId: column.word,
     url: column.word,
     intentId: column.word,
+    turn: column.whole,
     createdAt: column.instant,
   });
 

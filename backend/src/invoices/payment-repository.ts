@@ -31,6 +31,11 @@ export class PaymentRepository extends WorkshopRows<PaymentRow> {
     return (await this.list(workshopId, { where: { externalId }, limit: 1 }))[0];
   }
 
+  /** What was written down of one refund or dispute of the payment service. */
+  following(workshopId: string, outsideId: string): Promise<PaymentRow[]> {
+    return this.list(workshopId, { where: { [Op.or]: [{ externalId: outsideId }, { follows: outsideId }] } });
+  }
+
   refundsOf(workshopId: string, paymentId: string): Promise<PaymentRow[]> {
     return this.list(workshopId, { where: { refundsPaymentId: paymentId } });
   }
@@ -55,6 +60,16 @@ export class PaymentRepository extends WorkshopRows<PaymentRow> {
   sharesOf(workshopId: string, paymentIds: readonly string[]): Promise<PaymentShareRow[]> {
     if (paymentIds.length === 0) return Promise.resolve([]);
     return this.shares.list(workshopId, { where: { paymentId: [...paymentIds] } });
+  }
+
+  /** The invoices that a payment was taken back from, in the order they were paid. */
+  async reopenedBy(workshopId: string, paymentId: string): Promise<string[]> {
+    const rows = await this.database.select<{ invoiceId: string }>(
+      `SELECT invoice_id AS invoiceId FROM payment_shares WHERE workshop_id = :workshopId AND payment_id = :paymentId
+       GROUP BY invoice_id HAVING MIN(amount_minor) < 0 ORDER BY MIN(id)`,
+      { workshopId, paymentId },
+    );
+    return rows.map(({ invoiceId }) => invoiceId);
   }
 
   /** What each invoice holds of a payment, what was taken back already counted. */

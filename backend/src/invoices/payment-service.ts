@@ -16,6 +16,8 @@ interface Parts extends InvoiceParts {
   readonly settling: SettlingService;
 }
 
+type RecordedField = 'id' | 'workshopId' | 'recordedAt' | 'recordedBy' | 'deed' | 'follows';
+
 const refuse = (path: Complaint['path'], code: Complaint['code'], values: Complaint['values'] = {}): never => {
   throw new Rejection('invalid', 'problem-invalid', { complaints: [{ path, code, values }] });
 };
@@ -84,7 +86,7 @@ export class PaymentService {
       subject: { kind: 'invoice', id: invoiceId },
       ...(invoice.jobId ? { jobId: invoice.jobId } : {}),
       code: 'history-written-off',
-      values: { amount_minor, number: invoice.number ?? '' },
+      values: { amount_minor, number: invoice.number ?? '', reason },
     });
     return this.parts.invoices.get(workshopId, invoiceId);
   }
@@ -92,10 +94,16 @@ export class PaymentService {
   /** Writes a payment down, nothing of it put to an invoice yet. */
   async add(
     by: { readonly workshopId: string; readonly name: string },
-    payment: Omit<PaymentRow, 'id' | 'workshopId' | 'recordedAt' | 'recordedBy'> & { readonly id?: string },
+    payment: Omit<PaymentRow, RecordedField> & Partial<Pick<PaymentRow, 'id' | 'deed' | 'follows'>>,
   ): Promise<PaymentRow> {
     const recorded = { recordedAt: this.parts.clock.now(), recordedBy: by.name };
-    return this.parts.payments.insert(by.workshopId, { id: newId(), ...payment, ...recorded });
+    return this.parts.payments.insert(by.workshopId, {
+      id: newId(),
+      deed: null,
+      follows: null,
+      ...payment,
+      ...recorded,
+    });
   }
 
   private async mustFit(workshopId: string, entry: PaymentEntry): Promise<void> {

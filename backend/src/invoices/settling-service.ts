@@ -1,5 +1,5 @@
 import { v7 as newId } from 'uuid';
-import { releasedShares, type Share } from '#shared/invoices/payment-shares';
+import { paymentShares, releasedShares, type Share } from '#shared/invoices/payment-shares';
 import type { MinorUnits } from '#shared/money/decimal';
 import { sumMinor } from '#shared/money/sum-minor';
 import type { Clock } from '../platform/clock/clock';
@@ -53,6 +53,15 @@ export class SettlingService {
     }
     const freed_minor = sumMinor(shares.map((share) => share.amount_minor));
     await this.parts.payments.write(workshopId, id, { creditMinor: payment.creditMinor + freed_minor });
+  }
+
+  /** Puts credit of a payment back to the invoices it was taken from, as far as they are open; what none takes stays credit. */
+  async restore(payment: PaymentRow, amount_minor: MinorUnits): Promise<void> {
+    const { workshopId, id } = payment;
+    const open: { invoiceId: string; open_minor: MinorUnits }[] = [];
+    for (const invoiceId of await this.parts.payments.reopenedBy(workshopId, id))
+      open.push({ invoiceId, open_minor: (await this.parts.invoices.lock(workshopId, invoiceId)).openMinor });
+    await this.share(payment, paymentShares(amount_minor, open).shares);
   }
 
   /** A credit note takes from what is open; what was paid beyond that becomes credit of the payments it came from. */

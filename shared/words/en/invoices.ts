@@ -61,6 +61,7 @@ export const invoices = {
     'This refund was entered already, of another payment or over another amount. Nothing was given back now.',
   'refund-of-refund': 'A refund cannot be refunded.',
   'refund-unreachable': 'The payment service did not take the refund. Nothing was changed; please try again.',
+  'refund-failed': 'The payment service could not give this back. Nothing was changed; give it back by bank instead.',
   'write-off-over': 'Only {open_minor} is open.',
   'reminder-not-due': 'Invoice {number} is not overdue.',
   'reminder-no-address': 'No e-mail address is known for {name}.',
@@ -84,7 +85,10 @@ export const invoices = {
   'history-payment-shared': 'Put {amount_minor} of a payment to invoice {number}.',
   'history-payment-card': '{client} paid {amount_minor} by card.',
   'history-refunded': 'Gave {amount_minor} back to {client}.',
-  'history-written-off': 'Wrote off {amount_minor} of invoice {number}.',
+  'history-refund-failed': 'A refund of {amount_minor} did not reach {client}; the money is back here.',
+  'history-dispute-took': 'The bank of {client} took {amount_minor} back: the payment by card is disputed.',
+  'history-dispute-gave': 'The dispute with {client} is settled; {amount_minor} came back.',
+  'history-written-off': 'Wrote off {amount_minor} of invoice {number}: {reason}',
   'history-reminded': 'Reminded {client} of invoice {number}.',
   'history-statement-sent': 'Sent {client} a statement to {email}.',
   'history-checkout-begun': 'Payment of invoice {number} by card was begun.',
@@ -155,6 +159,7 @@ export const invoices = {
   'ledger-credit-note': 'Credit note {number}',
   'ledger-payment': 'Payment {number}',
   'ledger-refund': 'Refund {number}',
+  'ledger-dispute': 'Disputed payment {number}',
   'ledger-write-off': 'Written off, {number}',
 
   // Journal
@@ -174,6 +179,7 @@ export const invoices = {
   'journal-kind-credit-note': 'Credit note',
   'journal-kind-payment': 'Payment',
   'journal-kind-refund': 'Refund',
+  'journal-kind-dispute': 'Disputed payment',
   'journal-kind-write-off': 'Written off',
   'journal-all': 'Together',
 } as const;

@@ -32,6 +32,7 @@ const ledgerWords = {
   'credit-note': 'ledger-credit-note',
   payment: 'ledger-payment',
   refund: 'ledger-refund',
+  dispute: 'ledger-dispute',
   'write-off': 'ledger-write-off',
 } as const;
 

@@ -11,20 +11,30 @@ export interface CardOrder {
   readonly returnUrl: string;
 }
 
-/** What the service says of money given back. */
+/** What the service says of money given back; one that failed came back to us, even where it was done before. */
 export interface CardRefund {
   readonly id: string;
   readonly amount_minor: number;
-  readonly isDone: boolean;
+  readonly standing: 'waiting' | 'done' | 'failed';
 }
 
-/** Where a payment stands with the service, and what was given back of it. */
+/** A payment the payer’s bank disputes: while it is undecided, and where it is lost, the money is taken from us. */
+export interface CardDispute {
+  readonly id: string;
+  readonly amount_minor: number;
+  /** ISO 4217; a bank may name the amount in a currency of its own. */
+  readonly currency: string;
+  readonly isTaken: boolean;
+}
+
+/** Where a payment stands with the service, what was given back of it, and what was taken back. */
 export interface CardState {
   readonly status: 'open' | 'paid' | 'expired' | 'refused';
   readonly amount_minor: number;
   readonly currency: string;
   readonly intentId: string | null;
   readonly refunds: readonly CardRefund[];
+  readonly disputes: readonly CardDispute[];
 }
 
 /** An event whose signature fits, as far as it tells what to ask about. */

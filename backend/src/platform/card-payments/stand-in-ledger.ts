@@ -20,9 +20,18 @@ export interface StandInRefund {
   readonly id: string;
   readonly object: 'refund';
   readonly amount: number;
-  readonly status: 'succeeded';
+  readonly status: 'succeeded' | 'pending' | 'failed';
   readonly payment_intent: string;
   readonly metadata: Readonly<Record<string, string>>;
+}
+
+export interface StandInDispute {
+  readonly id: string;
+  readonly object: 'dispute';
+  readonly amount: number;
+  readonly currency: string;
+  readonly status: 'warning_needs_response' | 'needs_response' | 'under_review' | 'won' | 'lost';
+  readonly payment_intent: string;
 }
 
 type Fields = Readonly<Record<string, string>>;
@@ -32,10 +41,17 @@ export const fieldsOf = (body: string): Record<string, string> => Object.fromEnt
 
 const product = 'line_items[0][price_data]';
 
-/** What the stand-in remembers: sessions, and what was given back. */
+const changedIn = <T extends { readonly id: string }>(rows: T[], id: string, change: Partial<T>): T => {
+  const place = rows.findIndex((row) => row.id === id);
+  if (place < 0) throw new Error('there is none of this name');
+  return (rows[place] = { ...rows[place], ...change });
+};
+
+/** What the stand-in remembers: sessions, what was given back, and what a bank disputes. */
 export class StandInLedger {
   private readonly sessions = new Map<string, StandInSession>();
   private readonly refunds: StandInRefund[] = [];
+  private readonly disputes: StandInDispute[] = [];
 
   begin(fields: Fields, address: string): StandInSession {
     const id = `cs_test_${randomUUID().replace(/-/g, '')}`;
@@ -75,11 +91,38 @@ export class StandInLedger {
     return this.refunds.filter((refund) => refund.payment_intent === intentId);
   }
 
+  /** A refund that was done may fail days later, when the bank sends the money back. */
+  changeRefund(id: string, status: StandInRefund['status']): StandInRefund {
+    return changedIn(this.refunds, id, { status });
+  }
+
+  disputesOf(intentId: string): StandInDispute[] {
+    return this.disputes.filter((dispute) => dispute.payment_intent === intentId);
+  }
+
+  /** What a bank does for its payer: all of the payment, unless it says otherwise. */
+  dispute(intentId: string, more: Partial<StandInDispute> = {}): StandInDispute {
+    const paid = this.paidBy(intentId);
+    if (!paid) throw new Error('there is no such payment');
+    const dispute: StandInDispute = {
+      ...{ id: `du_${randomUUID().replace(/-/g, '')}`, object: 'dispute', status: 'needs_response' },
+      ...{ amount: paid.amount_total, currency: paid.currency, payment_intent: intentId },
+      ...more,
+    };
+    this.disputes.push(dispute);
+    return dispute;
+  }
+
+  changeDispute(id: string, status: StandInDispute['status']): StandInDispute {
+    return changedIn(this.disputes, id, { status });
+  }
+
   refund(fields: Fields): StandInRefund {
     const intentId = fields['payment_intent'] ?? '';
-    const paid = [...this.sessions.values()].find((session) => session.payment_intent === intentId);
+    const paid = this.paidBy(intentId);
     const amount = Number(fields['amount']);
-    const before = this.refundsOf(intentId).reduce((sum, refund) => sum + refund.amount, 0);
+    const standing = this.refundsOf(intentId).filter(({ status }) => status !== 'failed');
+    const before = standing.reduce((sum, refund) => sum + refund.amount, 0);
     if (!paid || !(amount >= 1) || before + amount > paid.amount_total) throw new Error('that much was not paid');
     const refund: StandInRefund = {
       ...{ id: `re_${randomUUID().replace(/-/g, '')}`, object: 'refund', amount, status: 'succeeded' },
@@ -87,6 +130,10 @@ export class StandInLedger {
     };
     this.refunds.push(refund);
     return refund;
+  }
+
+  private paidBy(intentId: string): StandInSession | undefined {
+    return [...this.sessions.values()].find((session) => session.payment_intent === intentId);
   }
 
   private change(id: string, change: Partial<StandInSession>): StandInSession {

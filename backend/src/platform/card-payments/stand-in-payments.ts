@@ -3,7 +3,13 @@ import { createServer, type IncomingMessage, type Server, type ServerResponse } 
 import type { AddressInfo } from 'node:net';
 import Stripe from 'stripe';
 import { payOrLeave } from './pay-or-leave';
-import { fieldsOf, StandInLedger, type StandInSession } from './stand-in-ledger';
+import {
+  fieldsOf,
+  StandInLedger,
+  type StandInDispute,
+  type StandInRefund,
+  type StandInSession,
+} from './stand-in-ledger';
 
 /** What the stand-in needs: how its events reach the server, and what time it is. */
 export interface StandInSettings {
@@ -66,6 +72,28 @@ export class StandInPayments {
     return session;
   }
 
+  /** A bank takes a payment back; it is told of twice, as the service does. */
+  async dispute(intentId: string, more: Partial<StandInDispute> = {}): Promise<StandInDispute> {
+    const dispute = this.ledger.dispute(intentId, more);
+    await this.tell('charge.dispute.created', dispute);
+    await this.tell('charge.dispute.funds_withdrawn', dispute);
+    return dispute;
+  }
+
+  async closeDispute(id: string, status: 'won' | 'lost'): Promise<StandInDispute> {
+    const dispute = this.ledger.changeDispute(id, status);
+    await this.tell('charge.dispute.closed', dispute);
+    return dispute;
+  }
+
+  /** A refund did not reach its payer. */
+  async failRefund(id: string): Promise<StandInRefund> {
+    const refund = this.ledger.changeRefund(id, 'failed');
+    await this.tell('refund.failed', refund);
+    await this.tell('charge.refund.updated', refund);
+    return refund;
+  }
+
   /** An event as it is sent, signed. */
   signed(kind: string, object: object, id = `evt_${randomUUID()}`): { bytes: Buffer; signature: string } {
     const seconds = Math.floor(this.settings.now().getTime() / 1_000);
@@ -122,6 +150,8 @@ export class StandInPayments {
     if (method === 'POST' && id && path.endsWith('/expire')) return this.ledger.expire(id);
     if (method === 'GET' && path === '/v1/refunds')
       return { object: 'list', has_more: false, data: this.ledger.refundsOf(fields['payment_intent'] ?? '') };
+    if (method === 'GET' && path === '/v1/disputes')
+      return { object: 'list', has_more: false, data: this.ledger.disputesOf(fields['payment_intent'] ?? '') };
     if (method !== 'POST' || path !== '/v1/refunds') return undefined;
     const refund = this.ledger.refund(fields);
     // Told beside the answer, as the service does: whoever asked may hold what the event waits for.

@@ -77,6 +77,9 @@ const scopeOf = (endpoint: Endpoint, request: Request): string => {
   return signedIn?.actor?.membershipId ?? signedIn?.person.accountId ?? `address ${request.ip ?? ''}`;
 };
 
+/** Reading needs no transaction, and what goes in steps opens its own. */
+const isOneTransaction = ({ method, inSteps = false }: Endpoint): boolean => method !== 'get' && !inSteps;
+
 /** The Express handler of a route: parse, run in one transaction if it changes something, check the answer, send it. */
 export function serve(route: Route, serving: Serving): RequestHandler {
   const { endpoint } = route;
@@ -93,10 +96,9 @@ export function serve(route: Route, serving: Serving): RequestHandler {
   const turns = endpoint.atOnce === undefined ? undefined : new Turns(endpoint.atOnce);
   return async (request: Request, response: Response) => {
     const call = callOf(endpoint, request, serving.sessions);
-    const work =
-      endpoint.method === 'get'
-        ? () => run(request, call)
-        : () => serving.database.transaction(() => once(request, call));
+    const work = isOneTransaction(endpoint)
+      ? () => serving.database.transaction(() => once(request, call))
+      : () => run(request, call);
     const answer = await (turns ? turns.take(work) : work()).catch((error: unknown) =>
       Promise.reject(withCurrent(route, call, error) as Error),
     );

@@ -2,7 +2,7 @@ import type { InvoiceKind } from '#shared/invoices/invoice';
 import type { InvoiceSummary } from '#shared/invoices/invoice-schema';
 import type { LedgerKind } from '#shared/invoices/ledger-entry';
 import type { Age } from '#shared/invoices/owed-by-age';
-import type { PaymentWay } from '#shared/invoices/payment-schema';
+import type { Payment, PaymentWay } from '#shared/invoices/payment-schema';
 
 export const invoiceKindNames: Readonly<Record<InvoiceKind, string>> = {
   invoice: $localize`Invoice`,
@@ -14,6 +14,7 @@ export const ledgerKindNames: Readonly<Record<LedgerKind, string>> = {
   'credit-note': $localize`Credit notes`,
   payment: $localize`Payments`,
   refund: $localize`Refunds`,
+  dispute: $localize`Disputed payments`,
   'write-off': $localize`Written off`,
 };
 
@@ -23,6 +24,7 @@ export const ledgerEntryNames: Readonly<Record<LedgerKind, string>> = {
   'credit-note': $localize`Credit note`,
   payment: $localize`Payment`,
   refund: $localize`Refund`,
+  dispute: $localize`Disputed payment`,
   'write-off': $localize`Written off`,
 };
 
@@ -39,6 +41,14 @@ export const paymentWayNames: Readonly<Record<PaymentWay, string>> = {
   cash: $localize`in cash`,
   card: $localize`by card`,
 };
+
+/** What a movement beside a payment is, in a word; nothing for a payment itself. */
+export function movementName({ deed, amount_minor }: Payment): string {
+  if (deed === 'refund') return $localize`given back`;
+  if (deed === 'refund-failed') return $localize`refund that failed`;
+  if (deed === 'payment') return '';
+  return amount_minor < 0 ? $localize`taken back by the bank` : $localize`dispute settled`;
+}
 
 /** Where a paper stands, in a word. */
 export type InvoiceStanding = 'draft' | 'overdue' | 'open' | 'settled' | 'credit-note';

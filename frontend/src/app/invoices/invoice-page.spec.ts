@@ -107,7 +107,14 @@ describe('InvoicePage, issued', () => {
     const visit = await begin(sampleInvoice({ open_minor: 100_00 }));
     const payment = {
       ...{ id: invoiceId(60), clientId: invoiceId(90), clientName: 'Ashgrove House', way: 'bank', currency: 'EUR' },
-      ...{ amount_minor: 146_00, credit_minor: 0, receivedOn: '2026-03-05', reference: '', refundsPaymentId: null },
+      ...{
+        amount_minor: 146_00,
+        credit_minor: 0,
+        receivedOn: '2026-03-05',
+        reference: '',
+        refundsPaymentId: null,
+        deed: 'payment',
+      },
       ...{ shares: [{ invoiceId: invoiceId(10), number: '2026-0007', amount_minor: 146_00 }], recordedBy: 'Imke Vale' },
     };
     const note = sampleSummary({ id: invoiceId(20), kind: 'credit-note', number: 'C2026-0002', due_minor: 12_00 });

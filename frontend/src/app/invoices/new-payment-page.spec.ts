@@ -18,7 +18,14 @@ describe('NewPaymentPage', () => {
   };
   const recorded = {
     ...{ id: invoiceId(60), clientId: invoiceId(90), clientName: 'Ashgrove House', way: 'bank', currency: 'EUR' },
-    ...{ amount_minor: 120_00, credit_minor: 0, receivedOn: '2026-03-05', reference: '', refundsPaymentId: null },
+    ...{
+      amount_minor: 120_00,
+      credit_minor: 0,
+      receivedOn: '2026-03-05',
+      reference: '',
+      refundsPaymentId: null,
+      deed: 'payment',
+    },
     ...{ shares: [], recordedBy: 'Imke Vale' },
   };
 

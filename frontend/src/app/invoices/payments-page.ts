@@ -7,7 +7,7 @@ import { PagedList } from '../core/lists/paged-list';
 import { ListBody } from '../jobs';
 import { EmptyState } from '../ui/page/empty-state';
 import { InvoiceCalls } from './invoice-calls';
-import { paymentWayNames } from './invoice-names';
+import { movementName, paymentWayNames } from './invoice-names';
 import { PaymentRefund } from './payment-refund';
 import { PaymentSharing } from './payment-sharing';
 
@@ -29,6 +29,7 @@ export class PaymentsPage {
   protected readonly formats = inject(Formats);
 
   protected readonly wayNames = paymentWayNames;
+  protected readonly movementName = movementName;
   protected readonly opened = signal<Opened | undefined>(undefined);
   private readonly asked = computed(() => ({}));
   protected readonly list = new PagedList<object, Payment>(this.asked, (_, cursor, signal) =>
