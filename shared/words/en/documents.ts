@@ -107,6 +107,10 @@ export const documents = {
   'paper-acceptance-place': 'Place and date',
   'paper-acceptance-name': 'Name and signature',
 
+  // Letters the fonts of the papers do not have
+  'letters-not-printed':
+    '{part, select, title {The title} introduction {The introduction} included {“Included”} excluded {“Not included”} terms {The terms} note {The note} stage {The stage “{name}”} line {The line “{name}”} alternative {The alternative “{name}”} piece {The piece “{name}”} member {The member “{name}”} zone {The zone “{name}”} allowance {The reason “{name}”} exemption {The reason for no tax} workshop {The letterhead} client {The client’s name or address} job {The job’s title, reference or site} buyer {The buyer’s name, address or reference} account {The name of the bank account} card {On the rate card, “{name}”} other {A text}} would print with empty boxes in place of {letters}{more, plural, =0 {} one { and one more} other { and # more}}. The fonts of the papers have Latin, Greek and Cyrillic letters.',
+
   // The leaf order
   'paper-order-title': 'Leaf order',
   'paper-order-head': 'Leaf order for estimate {number}, issue {letter}',

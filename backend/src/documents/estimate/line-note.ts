@@ -1,6 +1,6 @@
 import type { PriceLine } from '#shared/estimates/price/price';
 import type { WorkKind } from '#shared/estimates/price/work-kind';
-import { printableText } from '../paper/printable-text';
+import { printableText } from '#shared/words/printable-text';
 import { type IssueContent, memberOf } from './issue-content';
 
 /** What a kind of work is called on paper. */

@@ -1,7 +1,7 @@
+import { printableText } from '#shared/words/printable-text';
 import type { Pdf } from './open-paper';
 import { textStyles, type TextStyle } from './paper-colours';
 import { textLines, textWidth } from './text-lines';
-import { printableText } from './printable-text';
 
 /** A column: as wide as its widest figure, of a given width, or (exactly one) what the others leave. */
 export interface TableColumn {

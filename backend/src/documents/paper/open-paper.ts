@@ -1,7 +1,7 @@
 import PDFDocument from 'pdfkit';
+import { printableText } from '#shared/words/printable-text';
 import { paperFonts } from './paper-fonts';
 import { pageMargins, type PaperFont } from './paper-colours';
-import { printableText } from './printable-text';
 
 /** What a paper is, apart from what stands on it. */
 export interface PaperFacts {

@@ -1,10 +1,12 @@
 import fc from 'fast-check';
 import type { DrawingView } from '#shared/measure/drawing/drawing';
+import { printableText } from '#shared/words/printable-text';
+import { printedRanges } from '#shared/words/printed-ranges';
 import { dimensionPlaces } from './dimension-places';
 import { fileName } from '../file-names';
 import { openPaper } from './open-paper';
 import { textStyles } from './paper-colours';
-import { printableText } from './printable-text';
+import { paperFonts } from './paper-fonts';
 import { fittedLine, textLines, textWidth } from './text-lines';
 import { viewLayout } from './view-layout';
 
@@ -17,6 +19,16 @@ const pdf = openPaper({
   madeAt: '2026-03-02T09:30:00Z',
 });
 const style = textStyles.body;
+
+it('knows exactly the letters every one of its fonts has', () => {
+  const sets = Object.keys(paperFonts()).map((name) => {
+    const { _font } = pdf.font(name) as unknown as { _font: { font: { characterSet: number[] } } };
+    return new Set(_font.font.characterSet);
+  });
+  const everywhere = [...sets[0]].filter((code) => code >= 0x20 && sets.every((set) => set.has(code)));
+  const told = printedRanges.flatMap(([from, to]) => Array.from({ length: to - from + 1 }, (_, step) => from + step));
+  expect(told).toEqual(everywhere.sort((one, other) => one - other));
+});
 
 describe('lines of text', () => {
   it('fit the width and lose no word', () => {

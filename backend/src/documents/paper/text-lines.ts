@@ -1,6 +1,6 @@
+import { printableText } from '#shared/words/printable-text';
 import type { Pdf } from './open-paper';
 import type { TextStyle } from './paper-colours';
-import { printableText } from './printable-text';
 
 /** Figures all of one width and standing on the line, letters kerned: everywhere, since Alegreya's own figures hang. */
 const features = ['lnum', 'tnum', 'kern', 'liga'] as unknown as PDFKit.Mixins.OpenTypeFeatures[];

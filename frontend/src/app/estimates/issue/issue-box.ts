@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@a
 import { MatButton } from '@angular/material/button';
 import { Router, RouterLink } from '@angular/router';
 import type { Finding } from '#shared/words/finding';
+import { letterFindings } from '#shared/words/letter-findings';
 import { Formats } from '../../core/formats/formats';
 import { Notices } from '../../core/problems/notices';
 import { Entry } from '../../ui/field/entry';
@@ -13,6 +14,7 @@ import { distinctFindings } from './distinct-findings';
 import { findingPlace } from './finding-place';
 import { IssueParts } from './issue-parts';
 import { Issuing } from './issuing';
+import { LettersNotPrinted } from './letters-not-printed';
 
 const stopping: readonly Finding['kind'][] = ['refuse', 'missing'];
 const told: readonly Finding['kind'][] = ['caution', 'note'];
@@ -22,7 +24,7 @@ const told: readonly Finding['kind'][] = ['caution', 'note'];
   selector: 'app-issue-box',
   imports: [Entry, Field, FindingList, FormComplaint, MatButton, RouterLink],
   changeDetection: ChangeDetectionStrategy.OnPush,
-  providers: [Issuing],
+  providers: [Issuing, LettersNotPrinted],
   templateUrl: './issue-box.html',
   styleUrl: './issue-box.scss',
 })
@@ -34,11 +36,15 @@ export class IssueBox {
   protected readonly parts = inject(IssueParts);
   protected readonly issuing = inject(Issuing);
 
+  private readonly letters = inject(LettersNotPrinted);
+
   protected readonly note = signal('');
   protected readonly acceptsOldCard = signal(false);
   private readonly findings = computed(() => [
     ...(this.store.figures()?.findings ?? []),
     ...(this.store.costed()?.cost.findings ?? []),
+    ...this.letters.findings(),
+    ...letterFindings([{ part: 'note', name: '', text: this.note() }]),
   ]);
   protected readonly stopping = computed(() => this.findings().filter(({ kind }) => stopping.includes(kind)));
   protected readonly warnings = computed(() => distinctFindings(this.findings().filter(({ kind }) => kind === 'warn')));

@@ -171,6 +171,35 @@ describe('The pages of issues', () => {
       ]);
     });
 
+    it('warns of letters the papers cannot print, names text and letters, leads there, and still lets one issue', async () => {
+      const [edge, leg] = server.members;
+      server.members = [edge, { ...leg, content: { ...leg.content, name: 'Leg 腿' } }];
+      server.settings = { ...server.settings, terms: 'תוך שבוע' };
+      await open(IssuePage);
+      const navigate = jest.spyOn(TestBed.inject(Router), 'navigate').mockResolvedValue(true);
+      const told = () =>
+        [...element().querySelectorAll('.checks app-finding-list > ul > .warn')]
+          .map((line) => spoken(line))
+          .filter((line) => line.includes('empty boxes'));
+      expect(told()).toEqual([
+        expect.stringContaining('The terms would print with empty boxes in place of ת ו ך ש ב ע.'),
+        expect.stringContaining('The member “Leg 腿” would print with empty boxes in place of 腿.'),
+      ]);
+      const note = element().querySelector<HTMLTextAreaElement>('app-issue-box textarea');
+      if (note) note.value = '如测量';
+      note?.dispatchEvent(new Event('input'));
+      await settle();
+      expect(told().at(-1)).toContain('The note would print with empty boxes in place of 如 测 量.');
+      expect(button('Issue B').disabled).toBe(false);
+      [...element().querySelectorAll<HTMLButtonElement>('.checks .warn button')]
+        .find((one) => spoken(one).includes('腿'))
+        ?.click();
+      expect(navigate.mock.calls[0]).toEqual([
+        ['/jobs', ids.job, 'estimates', ids.estimate, 'measure'],
+        { queryParams: { member: ids.leg } },
+      ]);
+    });
+
     it('is issued by one button; where it did not arrive it says so and may be pressed again', async () => {
       await open(IssuePage);
       const go = jest.spyOn(TestBed.inject(Router), 'navigateByUrl').mockResolvedValue(true);
