@@ -21,33 +21,38 @@ import type { ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { MomentSpan } from '#shared/programme/shop-calendar';
 import { Formats } from '../../core/formats/formats';
 import { smallScreen } from '../../ui/screen/small-screen';
-import { closedStretches, ribbonMarks, type RibbonMark } from './ribbon-marks';
-import { ribbonLayout } from './ribbon-layout';
+import { RibbonGround } from './ribbon-ground';
+import { RibbonLines } from './ribbon-lines';
 import type { RibbonLot, RibbonTask } from './ribbon-lot';
+import { RibbonDayNames } from './ribbon-day-names';
+import { RibbonPointer } from './ribbon-pointer';
+import { ribbonListening, type RibbonListener } from './ribbon-listening';
 import { ribbonRange } from './ribbon-range';
-import { pixelOf } from './ribbon-scale';
-import { storyPlace } from './story-place';
-import { taskAfter } from './task-after';
+import { RibbonRow } from './ribbon-row';
+import { pixelOf, zoomByWheel } from './ribbon-scale';
 import { RibbonView } from './ribbon-view';
-import { draggedBar, TaskDrag, type DraggedTask } from './task-drag';
+import { taskAfter } from './task-after';
+import { draggedBar, type DraggedTask } from './task-drag';
 
 const day_minutes = 1440;
+const rest_ms = 120;
 
 /** Lots down, time across: work solid, drying hatched, windows outlined, nights and closed days shaded. Only what is in view is drawn. */
 @Component({
   selector: 'app-dated-ribbon',
-  imports: [MatButton, RouterLink],
+  imports: [MatButton, RibbonRow, RouterLink],
   changeDetection: ChangeDetectionStrategy.OnPush,
   host: { '(document:keydown.escape)': 'giveUp()' },
   templateUrl: './dated-ribbon.html',
   styleUrls: ['./dated-ribbon.scss', './dated-ribbon-drawing.scss'],
 })
-export class DatedRibbon {
+export class DatedRibbon implements RibbonListener {
   private readonly formats = inject(Formats);
   private readonly injector = inject(Injector);
   private readonly isSmall = smallScreen();
   private readonly scroller = viewChild.required<ElementRef<HTMLElement>>('scroller');
-  private readonly dragging = new TaskDrag();
+  private readonly lines = new RibbonLines();
+  private readonly dayNames = new RibbonDayNames(this.formats);
 
   readonly label = input.required<string>();
   readonly lots = input.required<readonly RibbonLot[]>();
@@ -61,7 +66,7 @@ export class DatedRibbon {
   readonly dragged = output<DraggedTask | undefined>();
   readonly dropped = output<DraggedTask>();
 
-  protected readonly row_px = 68;
+  readonly row_px = 68;
   protected readonly head_px = 36;
   protected readonly zooms = [
     { name: $localize`Day`, days: 1 },
@@ -69,57 +74,42 @@ export class DatedRibbon {
     { name: $localize`Month`, days: 31 },
   ];
   protected readonly names_px = computed(() => (this.isSmall() ? 104 : 168));
-  protected readonly told = signal<{ task: RibbonTask; x: number; y: number } | undefined>(undefined);
   private readonly range = computed(() => ribbonRange(this.lots(), this.now_minutes()));
   private readonly first = computed(() => this.range().first_minutes);
-  protected readonly view = new RibbonView(this.range);
-  protected readonly height = computed(() => this.lots().length * this.row_px);
+  readonly view = new RibbonView(this.range);
+  readonly height = computed(() => this.lots().length * this.row_px);
   protected readonly rows = computed(() =>
-    ribbonLayout(this.lots(), { scale: this.view.scale(), part: this.view.part(), row_px: this.row_px }),
+    this.lines.in(this.lots(), { scale: this.view.laidScale(), part: this.view.laidPart(), row_px: this.row_px }),
   );
-  protected readonly marks = computed(() => ribbonMarks(this.view.part(), this.view.scale(), this.frame()));
+  protected readonly ground = new RibbonGround(this);
   protected readonly days = computed(() =>
-    this.marks()
-      .filter(({ kind, x }) => kind !== 'hour' && x < this.view.width() - 40)
-      .map((mark) => ({ x: mark.x, text: this.dayText(mark) })),
+    this.ground.days().map((mark) => ({ x: mark.x, text: this.dayNames.of(mark) })),
   );
-  protected readonly closed = computed(() =>
-    closedStretches(this.open(), { part: this.view.part(), scale: this.view.scale() }),
-  );
-  protected readonly nowX = computed(() => {
-    const now = this.now_minutes();
-    if (now === undefined) return null;
-    const x = pixelOf(now, this.view.scale());
-    return x >= 0 && x <= this.view.width() ? x : null;
-  });
-  protected readonly lineOf = computed(() => `M0 0H${this.view.width()}`);
+  protected readonly stretched = computed(() => (this.view.stretch() === 1 ? null : `scale(${this.view.stretch()} 1)`));
+  protected readonly pointer = new RibbonPointer(this.rows, this.view.stretch);
+  private resting: ReturnType<typeof setTimeout> | undefined;
   private readonly asked = signal<string | undefined>(undefined);
-  /** The task the Tab key leads to. */
+  /** The task the Tab key leads to, and its line. */
   protected readonly current = computed(() => {
-    const shown = this.rows().flatMap(({ tasks }) => tasks);
-    const isShown = (id: string | undefined) => shown.some(({ task }) => task.id === id);
-    return [this.asked(), this.chosen()].find(isShown) ?? shown.at(0)?.task.id;
+    const shown = this.rows().flatMap(({ lot, tasks }) =>
+      tasks.map(({ task }) => ({ lotId: lot.id, taskId: task.id })),
+    );
+    const of = (id: string | undefined) => id && shown.find(({ taskId }) => taskId === id);
+    return of(this.asked()) || of(this.chosen()) || shown.at(0);
   });
   protected readonly ghost = computed(() => {
-    const at = this.dragging.at();
-    return at && draggedBar(this.lots(), at, this.view.scale());
+    const at = this.pointer.dragged();
+    const bar = at && draggedBar(this.lots(), at, this.view.scale());
+    return bar && { ...bar, y: this.lots().findIndex(({ id }) => id === bar.lotId) * this.row_px };
   });
 
   constructor() {
     const destroy = inject(DestroyRef);
     afterNextRender(() => {
       const element = this.scroller().nativeElement;
-      const measure = () =>
-        this.view.look({ width: Math.max(80, element.clientWidth - this.names_px()), height: element.clientHeight });
-      const observer = new ResizeObserver(measure);
-      observer.observe(element);
-      const turn = (event: WheelEvent) => this.turn(event);
-      element.addEventListener('wheel', turn, { passive: false });
-      destroy.onDestroy(() => {
-        observer.disconnect();
-        element.removeEventListener('wheel', turn);
-      });
-      measure();
+      destroy.onDestroy(ribbonListening(element, this));
+      destroy.onDestroy(() => clearTimeout(this.resting));
+      this.measure(element);
       this.show(this.firstDays());
     });
     effect(() => this.begin(this.first()));
@@ -129,21 +119,35 @@ export class DatedRibbon {
   protected show(days: number | undefined): void {
     const { first_minutes, last_minutes } = this.range();
     const shown = days ?? (last_minutes - first_minutes) / day_minutes;
-    this.scrollTo(this.view.zoom(this.view.seen().width / (Math.max(1, shown) * 24)));
+    this.zoomTo(this.view.seen().width / (Math.max(1, shown) * 24));
   }
 
-  protected zoomBy(factor: number, at_px?: number): void {
-    this.scrollTo(this.view.zoom(this.view.hour_px() * factor, at_px));
+  protected zoomBy(factor: number): void {
+    this.zoomTo(this.view.hour_px() * factor);
+  }
+
+  private zoomTo(hour_px: number): void {
+    const left = this.view.zoom(hour_px);
+    this.view.settle();
+    this.scrollTo(left);
   }
 
   goTo(minutes: number): void {
     this.scrollTo(this.view.leftFor(minutes));
   }
 
-  protected follow(): void {
+  measure({ clientWidth, clientHeight }: HTMLElement): void {
+    this.view.look({ width: Math.max(80, clientWidth - this.names_px()), height: clientHeight });
+  }
+
+  follow(): void {
     const { scrollLeft: left, scrollTop: top } = this.scroller().nativeElement;
     this.view.look({ left, top });
-    this.told.set(undefined);
+    this.pointer.hush();
+  }
+
+  leave(): void {
+    this.pointer.hush();
   }
 
   protected press(event: KeyboardEvent): void {
@@ -165,44 +169,41 @@ export class DatedRibbon {
     return next !== undefined;
   }
 
-  protected grip(event: PointerEvent, task: RibbonTask): void {
-    if (!task.isMovable || event.button !== 0 || event.pointerType === 'touch') return;
-    this.dragging.begin(task, event.clientX);
-  }
-
-  protected drag(event: PointerEvent): void {
-    const at = this.dragging.move(event.clientX, this.view.hour_px());
+  move(event: PointerEvent): void {
+    const at = this.pointer.move(event, this.view.hour_px());
     if (!at) return;
     // Only once it moves: a press that does not stays with the task, and chooses it.
     this.scroller().nativeElement.setPointerCapture?.(event.pointerId);
-    this.told.set(undefined);
     this.dragged.emit(at);
   }
 
   protected drop(): void {
-    const at = this.dragging.end();
+    const at = this.pointer.release();
     if (at) this.dropped.emit(at);
   }
 
   protected giveUp(): void {
-    if (this.dragging.end()) this.dragged.emit(undefined);
-    this.told.set(undefined);
+    if (this.pointer.release()) this.dragged.emit(undefined);
+    this.pointer.hush();
   }
 
-  protected tell({ clientX, clientY, pointerType }: PointerEvent, task: RibbonTask): void {
-    if (pointerType !== 'touch' && !this.dragging.at()) this.tellAt(task, { x: clientX + 14, y: clientY + 18 });
+  choose(event: MouseEvent): void {
+    const task = this.pointer.taskAt(event);
+    if (task) this.chosen.set(task.id);
   }
 
-  protected tellFocused({ target }: FocusEvent, task: RibbonTask): void {
-    this.asked.set(task.id);
+  /** Where the keyboard is, that is told. */
+  protected attend({ target }: FocusEvent): void {
     const element = target as Element;
+    const taskId = element.getAttribute('data-task');
+    if (!taskId) return;
+    this.asked.set(taskId);
     if (!element.matches(':focus-visible')) return;
     const { left, bottom } = element.getBoundingClientRect();
-    this.tellAt(task, { x: left, y: bottom + 8 });
-  }
-
-  private tellAt(task: RibbonTask, at: { x: number; y: number }): void {
-    this.told.set({ task, ...storyPlace(at, { width: innerWidth, height: innerHeight }) });
+    const task = this.lots()
+      .flatMap(({ tasks }) => tasks)
+      .find(({ id }) => id === taskId);
+    this.pointer.tell(task, { x: left, y: bottom + 8 });
   }
 
   /** Puts the keyboard at a task, and the task into view. */
@@ -219,11 +220,15 @@ export class DatedRibbon {
     afterNextRender(focus, { injector: this.injector });
   }
 
-  private turn(event: WheelEvent): void {
-    if (!event.ctrlKey && !event.metaKey) return;
+  /** What is laid out is stretched until the wheel, or two fingers, rest. */
+  turn(event: WheelEvent): void {
+    const { ctrlKey, metaKey, deltaY, clientX } = event;
+    if (!ctrlKey && !metaKey) return;
     event.preventDefault();
-    const at_px = event.clientX - this.scroller().nativeElement.getBoundingClientRect().left - this.names_px();
-    this.zoomBy(event.deltaY < 0 ? 1.2 : 1 / 1.2, Math.max(0, at_px));
+    const at_px = clientX - this.scroller().nativeElement.getBoundingClientRect().left - this.names_px();
+    this.scrollTo(this.view.zoom(this.view.hour_px() * zoomByWheel(deltaY), Math.max(0, at_px)));
+    clearTimeout(this.resting);
+    this.resting = setTimeout(() => this.view.settle(), rest_ms);
   }
 
   /** Begins at now, where that lies within, else at the first task. */
@@ -240,10 +245,5 @@ export class DatedRibbon {
       this.follow();
     };
     afterNextRender(put, { injector: this.injector });
-  }
-
-  private dayText({ day, kind }: RibbonMark): string {
-    if (kind === 'month') return this.formats.day(day, 'month');
-    return this.formats.day(day, kind === 'week' || day.endsWith('-01') ? 'short' : 'weekday');
   }
 }

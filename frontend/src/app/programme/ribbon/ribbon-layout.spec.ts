@@ -1,10 +1,11 @@
 import { ribbonForSpecs, ribbonLot, ribbonTask } from './ribbon-for-specs';
-import { ribbonLayout, type DrawnPart } from './ribbon-layout';
+import type { DrawnPart } from './ribbon-layout';
+import { RibbonLines } from './ribbon-lines';
 
 const scale = { first_minutes: 0, last_minutes: 20_000, hour_px: 60 };
 const everything: DrawnPart = { left: 0, right: 1e6, top: 0, bottom: 1e6 };
 const layoutOf = (lots: Parameters<typeof ribbonLayout>[0], part = everything, hour_px = 60) =>
-  ribbonLayout(lots, { scale: { ...scale, hour_px }, part, row_px: 68 });
+  new RibbonLines().in(lots, { scale: { ...scale, hour_px }, part, row_px: 68 });
 
 describe('The layout of the ribbon', () => {
   it('puts work, drying and window where they fall', () => {
@@ -28,7 +29,7 @@ describe('The layout of the ribbon', () => {
 
   it('gives a finger something to press, however short the work', () => {
     const [{ tasks }] = layoutOf([ribbonLot('legs', [ribbonTask('size', 480)])], everything, 1);
-    expect(tasks[0].touch.width).toBeGreaterThanOrEqual(12);
+    expect(tasks[0].touch.width).toBeGreaterThanOrEqual(24);
     expect(tasks[0].work[0].width).toBeGreaterThanOrEqual(4);
   });
 

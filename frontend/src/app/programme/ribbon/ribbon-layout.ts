@@ -1,4 +1,5 @@
 import type { MomentSpan } from '#shared/programme/shop-calendar';
+import { ribbonBar } from './ribbon-bar';
 import type { RibbonLot, RibbonTask } from './ribbon-lot';
 import { pixelOf, type RibbonScale } from './ribbon-scale';
 
@@ -16,6 +17,8 @@ export interface DrawnTask {
   readonly window: Stretch | null;
   /** What is pressed, pointed at and dragged: never too small for a finger or a pointer. */
   readonly touch: Stretch;
+  /** Its work, or the moment it is, as one path. */
+  readonly path: string;
   readonly label: { readonly x: number; readonly text: string } | null;
 }
 
@@ -37,9 +40,11 @@ export interface DrawnPart {
 
 /** Shorter work is still to be seen. */
 const leastBar_px = 4;
-const leastTouch_px = 12;
+/** WCAG 2.2, 2.5.8: what is pressed measures 24 by 24 pixels at least. */
+const leastTouch_px = 24;
 const letter_px = 6.4;
 const gap_px = 8;
+const workBar = { y: 14, height: 26, radius: 3 };
 
 const stretch = ({ start_minutes, end_minutes }: MomentSpan, scale: RibbonScale, least = 0): Stretch => {
   const x = pixelOf(start_minutes, scale);
@@ -68,16 +73,22 @@ function touchOf(work: readonly Stretch[], x: number): Stretch {
   return { x: x - Math.max(0, leastTouch_px - (end - x)) / 2, width };
 }
 
+/** What takes no time is a mark at its moment. */
+const pathOf = (work: readonly Stretch[], x: number): string =>
+  work.length === 0 ? `M${x - 6} 27l6 -7l6 7l-6 7z` : work.map((one) => ribbonBar(one, workBar)).join('');
+
 function drawn(task: RibbonTask, scale: RibbonScale): Omit<DrawnTask, 'label'> {
   const work = joined(task.spans.map((span) => stretch(span, scale, leastBar_px)));
   const { end_minutes, dryUntil_minutes, window } = task;
   const isDrying = dryUntil_minutes !== null && dryUntil_minutes > end_minutes;
+  const x = pixelOf(task.start_minutes, scale);
   return {
     task,
     work,
     drying: isDrying ? stretch({ start_minutes: end_minutes, end_minutes: dryUntil_minutes }, scale) : null,
     window: window && stretch(window, scale, leastBar_px),
-    touch: touchOf(work, pixelOf(task.start_minutes, scale)),
+    touch: touchOf(work, x),
+    path: pathOf(work, x),
   };
 }
 
@@ -93,22 +104,18 @@ function labelled(tasks: readonly Omit<DrawnTask, 'label'>[]): DrawnTask[] {
   });
 }
 
-/**
- * The lines and tasks that lie in the part that is drawn, in pixels. Labels are laid out over the whole line, so that none comes or goes as one scrolls
- * along it.
- */
-export function ribbonLayout(
-  lots: readonly RibbonLot[],
-  { scale, part, row_px }: { readonly scale: RibbonScale; readonly part: DrawnPart; readonly row_px: number },
-): DrawnLot[] {
-  const first = Math.max(0, Math.floor(part.top / row_px));
-  return lots.slice(first, Math.ceil(part.bottom / row_px)).map((lot, at) => {
-    const index = first + at;
-    const all = labelled(lot.tasks.map((task) => drawn(task, scale)));
-    const isSeen = ({ task, touch, label }: DrawnTask): boolean => {
-      const right = Math.max(touch.x + touch.width, pixelOf(lastOf(task), scale), label ? label.x + 240 : 0);
-      return right >= part.left && touch.x <= part.right;
-    };
-    return { lot, index, y: index * row_px, tasks: all.filter(isSeen) };
+/** All of a line in pixels. Its labels are laid out over the whole of it, so that none comes or goes as one scrolls along it. */
+export const laidTasks = ({ tasks }: RibbonLot, scale: RibbonScale): DrawnTask[] =>
+  labelled(tasks.map((task) => drawn(task, scale)));
+
+/** What of a line lies between two pixels. */
+export function seenTasks(
+  all: readonly DrawnTask[],
+  scale: RibbonScale,
+  { left, right }: Pick<DrawnPart, 'left' | 'right'>,
+): DrawnTask[] {
+  return all.filter(({ task, touch, label }) => {
+    const end = Math.max(touch.x + touch.width, pixelOf(lastOf(task), scale), label ? label.x + 240 : 0);
+    return end >= left && touch.x <= right;
   });
 }

@@ -32,13 +32,24 @@ const isNamed = (day: Day, day_px: number): boolean => {
 const kindOf = (day_px: number): RibbonMark['kind'] =>
   day_px >= namedDay_px ? 'day' : day_px * 7 >= namedWeek_px ? 'week' : 'month';
 
+/** When days begin, found out once for each frame: the clocks of a zone take long to read. */
+const knownStarts = new WeakMap<ProgrammeFrame, Map<Day, number>>();
+
+function startOf(day: Day, frame: ProgrammeFrame): number {
+  const known = knownStarts.get(frame) ?? new Map<Day, number>();
+  knownStarts.set(frame, known);
+  const start = known.get(day) ?? minutesOfDay(day, frame);
+  known.set(day, start);
+  return start;
+}
+
 /** The days that begin within a part of the sheet. */
 function daysIn(part: DrawnPart, scale: RibbonScale, frame: ProgrammeFrame): readonly { day: Day; x: number }[] {
   const from = Math.floor((scale.first_minutes + (part.left * 60) / scale.hour_px) / 1440) - 2;
   const count = Math.ceil(((part.right - part.left) * 60) / scale.hour_px / 1440) + 5;
   return Array.from({ length: count }, (_, at) => {
     const day = addDays(frame.firstDay, from + at);
-    return { day, x: pixelOf(minutesOfDay(day, frame), scale) };
+    return { day, x: pixelOf(startOf(day, frame), scale) };
   });
 }
 

@@ -19,6 +19,9 @@ export const widthOf = (scale: RibbonScale): number => pixelOf(scale.last_minute
 
 export const withinZoom = (hour_px: number): number => Math.min(mostHour_px, Math.max(leastHour_px, hour_px));
 
+/** By how much a wheel changes the size: a notch by a fifth, two fingers by a little at a time. */
+export const zoomByWheel = (turned_px: number): number => Math.exp(-Math.max(-100, Math.min(100, turned_px)) / 500);
+
 /** Where the left edge stands after a zoom, so that what lay under a point of the screen lies there still; pixels. */
 export function scrolledAfterZoom(
   seen: { readonly scroll_px: number; readonly at_px: number },
