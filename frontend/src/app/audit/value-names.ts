@@ -99,7 +99,7 @@ export const valueNames: Readonly<Record<string, string>> = {
   firm: $localize`firm`,
   institution: $localize`institution`,
   open: $localize`open`,
-  sent: $localize`sent`,
+  sent: $localize`with the client`,
   accepted: $localize`accepted`,
   declined: $localize`declined`,
   finished: $localize`finished`,

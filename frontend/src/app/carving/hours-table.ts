@@ -37,7 +37,7 @@ export class HoursTable {
   protected readonly columns = computed<readonly FigureColumn<NamedHours>[]>(() => [
     {
       key: 'name',
-      heading: $localize`Work`,
+      heading: this.showsGrade() ? $localize`Work` : $localize`Grade`,
       kind: 'text',
       text: ({ name }) => name,
       // On a phone there is no room for a column of grades.

@@ -42,6 +42,13 @@ const opened = {
   },
 };
 
+const planned = {
+  ...opened,
+  id: id(33),
+  code: 'history-plan-kept',
+  values: { number: '2026-011-1', starts: '2026-05-04', finishes: '2026-06-12' },
+};
+
 @Component({
   selector: 'app-its-estimates',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -91,7 +98,9 @@ describe('JobPage', () => {
     await settle();
     http.expectOne(`/api/jobs/${id(11)}`).flush(job);
     await settle();
-    history().forEach((request) => request.flush({ items: [opened], next: null, count: 1, countIsExact: true }));
+    history().forEach((request) =>
+      request.flush({ items: [planned, opened], next: null, count: 2, countIsExact: true }),
+    );
     await settle();
   }
 
@@ -99,7 +108,14 @@ describe('JobPage', () => {
     await open(['owner']);
     const text = element().textContent ?? '';
     const said = ['Pier table', '2026-011, Ashgrove House', 'open', 'Saloon', 'Estimates of Pier table'];
-    expect([...said, 'Opened job 2026-011, Pier table.', 'Imke Vale'].filter((one) => !text.includes(one))).toEqual([]);
+    expect(
+      [
+        ...said,
+        'Opened job 2026-011, Pier table.',
+        'Planned estimate 2026-011-1: 4 May 2026 to 12 Jun 2026',
+        'Imke Vale',
+      ].filter((one) => !text.includes(one)),
+    ).toEqual([]);
   });
 
   it('puts the job away, on the version it shows, and reads its history anew', async () => {

@@ -71,7 +71,7 @@ describe('The pages of issues', () => {
       differences: () => Promise.resolve({ letter: 'A', lines: [difference] }),
       read: () =>
         Promise.resolve({
-          ...{ summary: issueA, differences: [], alternatives: [], estimate },
+          ...{ summary: issueA, differences: [], alternatives: [], dates: null, estimate },
           ...read,
         }),
       mark: (_id: string, mark: IssueMark) => {
@@ -276,6 +276,19 @@ describe('The pages of issues', () => {
       await settle();
       expect(marks.map(({ state }) => state)).toEqual(['accepted']);
       expect(element().querySelector('app-mark-form')).toBeNull();
+    });
+
+    it('shows the dates it was made with and what they assume, to the office as well', async () => {
+      const assumptions = [
+        { kind: 'note', code: 'programme-assumes-in-hand', values: { days: 3 } } as const,
+        { kind: 'note', code: 'programme-assumes-promised', values: { jobs: 2 } } as const,
+      ];
+      const days = { startsOn: '2026-03-09', finishesOn: '2026-04-17', offeredOn: '2026-04-24', workingDays: 30 };
+      read = { dates: { ...days, assumptions } };
+      await open(IssueViewPage, view, ['office']);
+      const dates = spoken(element().querySelector('app-frozen-dates'));
+      for (const part of ['9 Mar 2026', '17 Apr 2026', '24 Apr 2026', '30 working days']) expect(dates).toContain(part);
+      expect(element().querySelectorAll('app-frozen-dates li')).toHaveLength(2);
     });
 
     it('shows what its alternatives came to', async () => {

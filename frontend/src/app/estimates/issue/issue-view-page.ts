@@ -16,6 +16,7 @@ import { MoneyBar } from '../price/money-bar';
 import { DifferenceTable } from '../price/difference-table';
 import { PriceLines } from '../price/price-lines';
 import { FrozenAlternatives } from './frozen-alternatives';
+import { FrozenDates } from './frozen-dates';
 import { FrozenPayments } from './frozen-payments';
 import { FrozenTexts } from './frozen-texts';
 import { IssueClient } from './issue-client';
@@ -32,6 +33,7 @@ import { Validity } from './validity';
     DifferenceTable,
     EmptyState,
     FrozenAlternatives,
+    FrozenDates,
     FrozenPayments,
     FrozenTexts,
     IssueFacts,

@@ -27,9 +27,9 @@ import type { MemberForm } from '../members/member-form';
       grid-column: span 2;
     }
 
-    @media (min-width: 1200px) {
+    @media (min-width: 1000px) {
       .particulars {
-        grid-template-columns: minmax(0, 2.2fr) minmax(0, 1fr) minmax(0, 1.5fr) minmax(0, 1.5fr);
+        grid-template-columns: minmax(0, 1.8fr) minmax(0, 0.8fr) minmax(0, 1.6fr) minmax(0, 1.6fr);
       }
 
       .name {

@@ -11,8 +11,9 @@ export interface LineColumnsShown {
 }
 
 function costColumn(key: keyof RowCost, heading: string, formats: Formats): Column {
-  const write =
-    key === 'hours' ? (hours: number) => formats.number(hours, 1, 1) : (minor: number) => formats.amount(minor);
+  // Goods have no hours; a nought would look worked.
+  const hours = (hours: number) => (hours === 0 ? '' : formats.number(hours, 1, 1));
+  const write = key === 'hours' ? hours : (minor: number) => formats.amount(minor);
   return { key, heading, kind: 'figure', text: ({ cost }) => (cost ? write(cost[key]) : '') };
 }
 

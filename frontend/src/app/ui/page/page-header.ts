@@ -55,6 +55,11 @@ import { ChangeDetectionStrategy, Component, input } from '@angular/core';
         min-height: 0;
         padding: 16px;
       }
+
+      // A short name leaves room for the button beside it.
+      .names {
+        flex-basis: auto;
+      }
     }
   `,
 })
