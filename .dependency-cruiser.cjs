@@ -21,6 +21,9 @@ const paperWorker = '^backend/src/(documents|invoices)/(invoice-)?paper-worker\\
 const serverEntry = '^backend/src/[^/]+\\.ts$';
 const pageEntry = '^frontend/src/(app/)?[^/]+\\.ts$';
 
+/** What clients ask before their application is here must not bring it along, as the door would. */
+const askedAhead = '^frontend/src/app/client-page/asked-ahead\\.ts$';
+
 const never = (name, rule) => ({ name, severity: 'error', ...rule });
 
 const order = features.slice(0, -1).map((feature, index) =>
@@ -81,7 +84,7 @@ const doors = [
     from: { path: [serverEntry, pageEntry], pathNot: spec },
     to: {
       path: `^(backend/src|frontend/src/app)/${anyOf(features)}/`,
-      pathNot: ['/index\\.ts$', `^frontend/src/app/(${features.join('|')})/\\1-routes\\.ts$`],
+      pathNot: ['/index\\.ts$', `^frontend/src/app/(${features.join('|')})/\\1-routes\\.ts$`, askedAhead],
     },
   }),
   never('The demonstration goes through the doors of the features', {
@@ -100,7 +103,7 @@ const doors = [
     to: {
       path: [
         '^backend/src/(app|main)\\.ts$',
-        '^frontend/src/(main|client|app/(app|app-routes|app-config|client-config|client-bootstrap))\\.ts$',
+        '^frontend/src/(main|client|client-start|app/(app|app-routes|app-config|client-config|client-bootstrap))\\.ts$',
         '^seeders/',
       ],
     },
@@ -147,7 +150,7 @@ const techniques = [
         schemaOrEndpoints,
         '^shared/problems/',
         '^backend/src/platform/(config|http)/',
-        '^frontend/src/((main|client)\\.ts$|app/core/|app/.*-form\\.ts$)',
+        '^frontend/src/((main|client-start)\\.ts$|app/core/|app/.*-form\\.ts$)',
         spec,
         testSupport,
       ],

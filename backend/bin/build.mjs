@@ -3,6 +3,7 @@ import { existsSync, rmSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath, pathToFileURL } from 'node:url';
 import { buildServer } from './build-server.mjs';
+import { compressPages } from './compress-pages.mjs';
 import { prepareFirstVisit } from './client-first-visit.mjs';
 import { isCurrent, stampOf, writeStamp } from './source-stamp.mjs';
 
@@ -15,7 +16,10 @@ const parts = [
     name: 'the pages (half a minute)',
     stampFile: join(root, '.cache/built-pages.txt'),
     result: join(root, 'dist/web/index.html'),
-    sources: inRoot('frontend', 'shared', 'fonts', 'angular.json', 'package-lock.json', 'tsconfig.json'),
+    sources: inRoot(
+      ...['frontend', 'shared', 'fonts', 'angular.json', 'package-lock.json', 'tsconfig.json'],
+      ...['backend/bin/build.mjs', 'backend/bin/client-first-visit.mjs', 'backend/bin/compress-pages.mjs'],
+    ),
     build: buildPages,
   },
   {
@@ -32,6 +36,7 @@ async function buildPages() {
   await run(process.execPath, [ng, 'build', 'web', '--progress=false']);
   await run(process.execPath, [ng, 'build', 'client', '--progress=false', '--stats-json']);
   prepareFirstVisit(join(root, 'dist/web/client-files'));
+  await compressPages(join(root, 'dist/web'));
 }
 
 function run(command, args) {

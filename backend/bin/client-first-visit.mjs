@@ -1,12 +1,12 @@
 import { readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 
-/** What a client's first visit comes to in any case: the start, the words, the page of the link, and an estimate. */
+/** What a client's first visit comes to in any case: what is asked ahead, the start, the words, and the application with its first two pages. */
 const asked = [
+  'frontend/src/client.ts',
+  'frontend/src/client-start.ts',
+  'shared/words/en.ts',
   'frontend/src/app/client-bootstrap.ts',
-  'shared/words/en/index.ts',
-  'frontend/src/app/client-page/client-visit-page.ts',
-  'frontend/src/app/client-page/client-issue-page.ts',
 ];
 
 /** The files that bring these sources, with all that they need before they can run. */
@@ -17,10 +17,14 @@ function filesOf({ outputs }) {
     files.add(file);
     outputs[file].imports.filter(({ kind }) => kind === 'import-statement').forEach(({ path }) => add(path));
   };
-  Object.entries(outputs)
-    .filter(([, { entryPoint }]) => asked.includes(entryPoint))
-    .forEach(([file]) => add(file));
+  asked.forEach((source) => add(fileOf(outputs, source)));
   return [...files];
+}
+
+function fileOf(outputs, source) {
+  const found = Object.keys(outputs).find((file) => outputs[file].entryPoint === source);
+  if (!found) throw new Error(`The pages of clients were built without a file of their own for ${source}.`);
+  return found;
 }
 
 /** Has the page of clients bring its styles, and ask for its files at once: one after the other they cost a phone seconds. */

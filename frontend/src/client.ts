@@ -1,20 +1,9 @@
-import { loadTranslations } from '@angular/localize';
-import { config } from 'zod/v4/core';
-import { languageFor, languages } from './words/languages';
+import { askedAhead } from './app/client-page/asked-ahead';
 
-/** The pages of clients, an application of its own: nothing of the workshop's travels with them. The words come first, as in `main.ts`. */
-async function start(): Promise<void> {
-  // zod would otherwise try to make functions out of text, which the page's policy forbids.
-  config({ jitless: true });
-  const language = languageFor(navigator.languages);
-  const [catalogue, templates] = await Promise.all([
-    languages[language].catalogue(),
-    languages[language].templates?.(),
-  ]);
-  if (templates) loadTranslations({ ...templates });
-  document.documentElement.lang = language;
-  const { bootstrapClient } = await import('./app/client-bootstrap');
-  await bootstrapClient(catalogue);
-}
+/**
+ * The pages of clients, an application of its own: nothing of the workshop's travels with them. What the first page asks is asked before
+ * the application is here.
+ */
+askedAhead.begin(location);
 
-start().catch((error: unknown) => console.error(error));
+import('./client-start').then(({ start }) => start()).catch((error: unknown) => console.error(error));

@@ -1,16 +1,17 @@
 import * as z from 'zod';
 import { endpoint } from '#shared/actor/endpoint';
+import { clientOverviewSchema } from '#shared/client-page/client-overview-schema';
 import { emailAddress } from '#shared/problems/entry-schema';
 
 export const beginClientVisit = endpoint({
   name: 'beginClientVisit',
   summary:
-    'Begin a visit with the secret of a mailed link; the answer holds the token that changing requests must carry',
+    'Begin a visit with the secret of a mailed link; the answer holds the token that changing requests must carry, and what there is to read',
   method: 'post',
   path: '/api/client/visits',
   callers: 'anyone',
   body: z.strictObject({ token: z.string().min(1).max(200) }),
-  answers: { public: z.strictObject({ token: z.string() }) },
+  answers: { public: z.strictObject({ token: z.string(), papers: clientOverviewSchema }) },
 });
 
 export const askForClientSignIn = endpoint({

@@ -64,6 +64,29 @@ describe('A link', () => {
     expect((await read(visitor, other.issueId)).status).toBe(404);
   });
 
+  it('brings with the visit what there is to read, the same as is read afterwards', async () => {
+    const { issueId } = await sampleIssue(api.ours, api);
+    const visitor = await api.stranger();
+    const { token } = await linkTo(api.ours, api, issueId);
+    const begun = (await visitor.call(beginClientVisit, { body: { token } })).body as { papers: ClientOverview };
+    expect(begun.papers.jobs.flatMap(({ issues }) => issues.map(({ id }) => id))).toEqual([issueId]);
+    expect(begun.papers).toEqual(await overviewOf(visitor));
+  });
+
+  it('is read by many and worked once; what is asked meanwhile stands there all the same', async () => {
+    const { issueId } = await sampleChoices(api.ours, api);
+    const working = jest.spyOn(api.app.estimates.frozen, 'chosen');
+    const visitor = await clientOf(api.ours, api, issueId);
+    const first = await pageOf(visitor, issueId);
+    expect(working).toHaveBeenCalledTimes(first.alternatives.length);
+    await visitor.call(askClientQuestion, { params: { issueId }, body: { text: 'May the edge stay plain?' } });
+    const again = await pageOf(await clientOf(api.ours, api, issueId), issueId);
+    expect(working).toHaveBeenCalledTimes(first.alternatives.length);
+    expect(again.questions.map(({ text }) => text)).toEqual(['May the edge stay plain?']);
+    expect({ ...again, questions: [] }).toEqual(first);
+    working.mockRestore();
+  });
+
   it('stands whole in the answer that gives it and nowhere else: not in the database, not in a log line, not in an address', async () => {
     const sample = await sampleIssue(api.ours, api);
     const endsOn = addDays(await api.app.rateCards.service.today(api.ours.id), 10);

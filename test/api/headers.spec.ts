@@ -1,5 +1,6 @@
 import { writeFileSync } from 'node:fs';
 import { join } from 'node:path';
+import { brotliCompressSync } from 'node:zlib';
 import request from 'supertest';
 import { putLogo, readLogo } from '#shared/accounts/workshop-endpoints';
 import { disposition } from '../../backend/src/platform/http/send';
@@ -68,6 +69,21 @@ test('the policy of a page allows our own files only', async () => {
   expect(policy).toMatch(/base-uri 'self'/);
   expect(policy).toMatch(/script-src 'self';/);
   expect(policy).toMatch(/require-trusted-types-for 'script'/);
+});
+
+test('a text of the pages comes by brotli where it was made smaller and can be read, under its own name and type', async () => {
+  const smaller = brotliCompressSync('void 0;');
+  writeFileSync(join(api.platform.config.webFolder, 'small-ABCDEFGH.js'), 'void 0;');
+  writeFileSync(join(api.platform.config.webFolder, 'small-ABCDEFGH.js.br'), smaller);
+  const asked = (encoding: string) => get('/small-ABCDEFGH.js').set('accept-encoding', encoding);
+  const [brotli, plain] = [await asked('gzip, br'), await asked('identity')];
+  expect(brotli.headers).toMatchObject({
+    ...{ 'content-encoding': 'br', 'content-length': String(smaller.length), vary: 'Accept-Encoding' },
+    ...{ 'content-type': 'text/javascript; charset=utf-8', 'cache-control': 'public, max-age=31536000, immutable' },
+  });
+  expect([plain.headers['content-encoding'], plain.text]).toEqual([undefined, 'void 0;']);
+  expect(plain.headers['vary']).toBe('Accept-Encoding');
+  expect((await get('/main-ABCDEFGH.js').set('accept-encoding', 'br')).headers['content-encoding']).not.toBe('br');
 });
 
 test('a file under a hashed name is kept for ever, the page and the API never', async () => {

@@ -3,16 +3,15 @@ import type { ClientIssue } from '#shared/client-page/client-issue-schema';
 import type { ClientOverview } from '#shared/client-page/client-overview-schema';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import type { Choice } from '#shared/estimates/draft';
-import type { Figures } from '#shared/estimates/figures';
-import { Rejection } from '#shared/problems/rejection';
 import type { Accounts } from '../accounts';
-import type { Agreements, ClientIssueRows } from '../agreements';
+import type { Agreements } from '../agreements';
 import type { Estimates } from '../estimates';
 import { jobNumber, type NamedJobRow } from '../jobs';
 import { FileAnswer } from '../platform/http/answer';
 import type { ClientInvoices } from './client-invoices';
 import { presentClientIssue, presentClientSummary } from './client-issue-presenter';
 import { presentClientLetterhead } from './client-letterhead-presenter';
+import { FrozenIssuePages } from './frozen-issue-pages';
 
 interface Parts {
   readonly accounts: Pick<Accounts, 'workshops'>;
@@ -26,7 +25,11 @@ const isSameChoice = (one: Choice, other: Choice): boolean =>
 
 /** What a client reads: all that is theirs, one issue, its papers. */
 export class ClientPageService {
-  constructor(private readonly parts: Parts) {}
+  private readonly frozen: FrozenIssuePages;
+
+  constructor(private readonly parts: Parts) {
+    this.frozen = new FrozenIssuePages(parts.estimates.frozen);
+  }
 
   async overview(client: ClientActor): Promise<ClientOverview> {
     const workshop = await this.parts.accounts.workshops.get(client.workshopId);
@@ -55,7 +58,7 @@ export class ClientPageService {
       all: await scope.allOf(workshopId, issue.job.id),
       decision: await decisions.onIssue(workshopId, issueId),
       questions: await questions.ofJob(workshopId, issue.job.id),
-      alternatives: await this.alternatives(issue),
+      frozen: await this.frozen.of(issue),
       mayChoose: issue.snapshot.calculatorVersion === calculatorVersion,
       today: await this.today(client),
     });
@@ -80,18 +83,5 @@ export class ClientPageService {
     const issues = await this.parts.agreements.scope.allOf(client.workshopId, job.id);
     const shown = issues.map((issue) => presentClientSummary(issue, at));
     return { id: job.id, number: jobNumber(job), title: job.title, issues: shown };
-  }
-
-  /** Each alternative worked by itself from what was frozen; one that cannot be taken alone is shown without its strips. */
-  private async alternatives(issue: ClientIssueRows): Promise<Map<string, Figures>> {
-    const worked = new Map<string, Figures>();
-    for (const { id } of issue.snapshot.draft.settings.alternatives) {
-      const chosen = await this.parts.estimates.frozen.chosen(issue, [id]).catch((error: unknown) => {
-        if (error instanceof Rejection && error.kind === 'conflict') return undefined;
-        throw error;
-      });
-      if (chosen) worked.set(id, chosen.figures);
-    }
-    return worked;
   }
 }

@@ -26,5 +26,6 @@ export interface ClientPageNeeds {
 export function openClientPage(needs: ClientPageNeeds): ClientPage {
   const pages = new ClientPageService(needs);
   const { agreements } = needs;
-  return { routes: [...visitRoutes(agreements, needs.accounts.throttle), ...clientPageRoutes(pages, agreements)] };
+  const visits = visitRoutes({ ways: agreements, throttle: needs.accounts.throttle, pages });
+  return { routes: [...visits, ...clientPageRoutes(pages, agreements)] };
 }

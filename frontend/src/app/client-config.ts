@@ -1,4 +1,4 @@
-import { provideHttpClient, withFetch } from '@angular/common/http';
+import { provideHttpClient, withFetch, withInterceptors } from '@angular/common/http';
 import {
   type ApplicationConfig,
   ErrorHandler,
@@ -9,7 +9,7 @@ import {
 import { TitleStrategy, provideRouter, withComponentInputBinding, withInMemoryScrolling } from '@angular/router';
 import type { Catalogue } from '#shared/words/word-code';
 import { clientPageRoutes } from './client-page/client-page-routes';
-import { ClientSession } from './client-page';
+import { ClientSession, answeredAhead } from './client-page';
 import { CATALOGUE } from './core/formats/catalogue';
 import { PageErrorHandler } from './core/problems/page-error-handler';
 import { PageTitle } from './core/routing/page-title';
@@ -25,7 +25,7 @@ export const clientConfig = (catalogue: Catalogue): ApplicationConfig => ({
       withComponentInputBinding(),
       withInMemoryScrolling({ scrollPositionRestoration: 'enabled' }),
     ),
-    provideHttpClient(withFetch()),
+    provideHttpClient(withFetch(), withInterceptors([answeredAhead])),
     provideAppInitializer(() => void inject(Theme)),
     provideAppInitializer(() => inject(SESSION_PORT).read()),
     { provide: CATALOGUE, useValue: catalogue },

@@ -132,6 +132,7 @@ export class ClientVisit {
     await visit.settle();
     visit.http.expectOne(`/api/client/issues/${issue.issue.id}`).flush(issue);
     await visit.settle();
+    await visit.until('app-client-thread');
     return visit;
   }
 
@@ -148,6 +149,12 @@ export class ClientVisit {
     TestBed.tick();
     await new Promise((resolve) => setTimeout(resolve));
     TestBed.tick();
+  }
+
+  /** Waits for what comes once the page has nothing else to do. */
+  async until(selector: string): Promise<void> {
+    for (let tries = 0; tries < 50 && !this.element.querySelector(selector); tries++) await this.settle();
+    await this.settle();
   }
 
   button(text: string): HTMLButtonElement | undefined {

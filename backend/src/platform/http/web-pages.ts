@@ -3,6 +3,7 @@ import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import express, { Router, type RequestHandler } from 'express';
 import { pagePolicy } from './headers';
+import { smallerFiles } from './smaller-files';
 
 const year_seconds = 31_536_000;
 const hashed = /[-.][A-Za-z0-9_-]{8,}\.(?:js|css|woff2|png|svg)$/;
@@ -39,9 +40,9 @@ export function webPages(folder: string, isPage: (path: string) => boolean): Rou
     setHeaders: (response, path) => {
       response.setHeader(
         'Cache-Control',
-        hashed.test(path) ? `public, max-age=${year_seconds}, immutable` : 'no-cache',
+        hashed.test(path.replace(/\.br$/, '')) ? `public, max-age=${year_seconds}, immutable` : 'no-cache',
       );
     },
   });
-  return Router().use(files).use(page(folder, isPage));
+  return Router().use(smallerFiles(folder), files).use(page(folder, isPage));
 }

@@ -5,11 +5,13 @@ import {
   ElementRef,
   Injector,
   afterNextRender,
+  afterRenderEffect,
   computed,
   effect,
   inject,
   input,
   signal,
+  viewChild,
 } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
@@ -21,23 +23,33 @@ import { PageTitle } from '../core/routing/page-title';
 import { Session } from '../core/session/session';
 import { FindingList } from '../ui/page/finding-list';
 import { Skeleton } from '../ui/page/skeleton';
+import { ClientDecline, ClientReview, ClientThread } from './answering';
 import { ClientChoices } from './client-choices';
-import { ClientDecline } from './client-decline';
 import { ClientFrame } from './client-frame';
 import { ClientIssueStore } from './client-issue-store';
 import { ClientLines } from './client-lines';
 import { ClientPayments } from './client-payments';
 import { ClientPieces } from './client-pieces';
 import { ClientRefused } from './client-refused';
-import { ClientReview } from './client-review';
-import { ClientThread } from './client-thread';
 
 /** An estimate as its client reads it: the piece, the choices, the price, the terms, questions, and the answer. */
 @Component({
   selector: 'app-client-issue-page',
   imports: [
-    ...[ClientChoices, ClientDecline, ClientFrame, ClientLines, ClientPayments, ClientPieces, ClientRefused],
-    ...[ClientReview, ClientThread, FindingList, MatButton, NgTemplateOutlet, RouterLink, Skeleton],
+    ClientChoices,
+    ClientDecline,
+    ClientFrame,
+    ClientLines,
+    ClientPayments,
+    ClientPieces,
+    ClientRefused,
+    ClientReview,
+    ClientThread,
+    FindingList,
+    MatButton,
+    NgTemplateOutlet,
+    RouterLink,
+    Skeleton,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   providers: [ClientIssueStore],
@@ -54,6 +66,9 @@ export class ClientIssuePage {
   private readonly host = inject<ElementRef<HTMLElement>>(ElementRef);
 
   readonly issueId = input.required<string>();
+
+  /** The last look or declining, which are here a moment after they were asked for. */
+  private readonly answering = viewChild<unknown, ElementRef<HTMLElement>>('answering', { read: ElementRef });
 
   /** Reading it, looking at it for the last time, or declining it. */
   protected readonly step = signal<'reading' | 'reviewing' | 'declining'>('reading');
@@ -85,6 +100,7 @@ export class ClientIssuePage {
   constructor() {
     effect(() => this.store.open(this.issueId()));
     effect(() => this.session.visit(this.store.issue()?.letterhead));
+    afterRenderEffect(() => this.answering()?.nativeElement.querySelector('h1')?.focus());
     effect(() => {
       const issue = this.store.issue();
       if (issue) this.title?.name(issue.job.title);

@@ -1,36 +1,34 @@
 import type { Routes } from '@angular/router';
+import { ClientIssuePage } from './client-issue-page';
+import { ClientVisitPage } from './client-visit-page';
 
-/** What a client opens: the link of a letter, all of their papers, one issue, and where to ask for a link. */
+const laterPages = () => import('./later-pages');
+
+/**
+ * What a client opens: the link of a letter, all of their papers, one issue, and where to ask for a link. The first two pages of a visit come
+ * with the application, the others in one piece of their own: a phone on a slow line waits for every further file.
+ */
 export const clientPageRoutes: Routes = [
-  {
-    path: '',
-    pathMatch: 'full',
-    title: $localize`Your papers`,
-    loadComponent: () => import('./client-visit-page').then(({ ClientVisitPage }) => ClientVisitPage),
-  },
+  { path: '', pathMatch: 'full', title: $localize`Your papers`, component: ClientVisitPage },
   {
     path: 'papers',
     title: $localize`Your papers`,
-    loadComponent: () => import('./client-overview-page').then(({ ClientOverviewPage }) => ClientOverviewPage),
+    loadComponent: () => laterPages().then(({ ClientOverviewPage }) => ClientOverviewPage),
   },
   {
     path: 'sign-in',
     title: $localize`A link to your papers`,
-    loadComponent: () => import('./client-sign-in-page').then(({ ClientSignInPage }) => ClientSignInPage),
+    loadComponent: () => laterPages().then(({ ClientSignInPage }) => ClientSignInPage),
   },
-  {
-    path: 'issues/:issueId',
-    title: $localize`Your estimate`,
-    loadComponent: () => import('./client-issue-page').then(({ ClientIssuePage }) => ClientIssuePage),
-  },
+  { path: 'issues/:issueId', title: $localize`Your estimate`, component: ClientIssuePage },
   {
     path: 'invoices/:invoiceId',
     title: $localize`Your invoice`,
-    loadComponent: () => import('./client-invoice-page').then(({ ClientInvoicePage }) => ClientInvoicePage),
+    loadComponent: () => laterPages().then(({ ClientInvoicePage }) => ClientInvoicePage),
   },
   {
     path: 'payments/:checkoutId',
     title: $localize`Your payment`,
-    loadComponent: () => import('./client-payment-page').then(({ ClientPaymentPage }) => ClientPaymentPage),
+    loadComponent: () => laterPages().then(({ ClientPaymentPage }) => ClientPaymentPage),
   },
 ];

@@ -34,10 +34,10 @@ describe('ClientVisitPage', () => {
     expect(replaceState).toHaveBeenCalledWith('/client');
     const begun = page.http.expectOne({ method: 'POST', url: '/api/client/visits' });
     expect(begun.request.body).toEqual({ token: 'secret-of-the-link' });
-    begun.flush({ token: 'token-of-the-visit' });
+    begun.flush({ token: 'token-of-the-visit', papers: overview() });
     await page.settle();
     expect(TestBed.inject(Session).requestToken()).toBe('token-of-the-visit');
-    await page.answer(overviewUrl, overview());
+    page.http.expectNone(overviewUrl);
     expect(navigate).toHaveBeenCalledWith(`/client/issues/${issue.id}`, { replaceUrl: true });
   });
 

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, inject, resource } from '@angular/core';
 import { Router } from '@angular/router';
 import { readClientOverview } from '#shared/client-page/client-issues-endpoints';
+import type { ClientOverview } from '#shared/client-page/client-overview-schema';
 import { beginClientVisit } from '#shared/client-page/visits-endpoints';
 import { Api } from '../core/api/api';
 import { fragmentToken } from '../core/routing/fragment-token';
@@ -35,12 +36,14 @@ export class ClientVisitPage {
   protected readonly visit = resource({ loader: () => this.begin() });
 
   private async begin(): Promise<true> {
-    if (this.token) {
-      const { token } = await this.api.call(beginClientVisit, { body: { token: this.token } });
-      this.session.put(this.session.facts(), token);
-    }
-    const overview = await this.api.call(readClientOverview, {});
-    await this.router.navigateByUrl(firstPaper(overview), { replaceUrl: true });
+    const papers = this.token ? await this.opened(this.token) : await this.api.call(readClientOverview, {});
+    await this.router.navigateByUrl(firstPaper(papers), { replaceUrl: true });
     return true;
+  }
+
+  private async opened(secret: string): Promise<ClientOverview> {
+    const { token, papers } = await this.api.call(beginClientVisit, { body: { token: secret } });
+    this.session.put(this.session.facts(), token);
+    return papers;
   }
 }

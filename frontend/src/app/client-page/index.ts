@@ -1,1 +1,2 @@
+export { answeredAhead } from './answered-ahead';
 export { ClientSession } from './client-session';

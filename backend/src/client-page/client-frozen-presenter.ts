@@ -1,0 +1,60 @@
+import type { ClientIssue } from '#shared/client-page/client-issue-schema';
+import { buildUpsUsed } from '#shared/documents/buildups-used';
+import { careCodes } from '#shared/documents/care-codes';
+import { clientCautions } from '#shared/documents/client-cautions';
+import type { Figures } from '#shared/estimates/figures';
+import type { Snapshot } from '#shared/estimates/snapshot';
+import { presentBuildUp, presentClientAlternative } from './client-alternatives-presenter';
+import { presentClientPieces } from './client-pieces-presenter';
+import { presentClientPrice } from './client-price-presenter';
+
+function careOf({ card, draft, figures }: Snapshot): string[] {
+  const zones = draft.members.flatMap((member) => member.zones);
+  return careCodes({
+    systems: card.buildUps.buildUps
+      .filter(({ id }) => zones.some((zone) => zone.buildUpId === id))
+      .map((one) => one.system),
+    metals: card.leaf.products
+      .filter(({ id }) => figures.leaf.some((used) => used.productId === id))
+      .map((one) => one.metal),
+    isOutdoors: draft.settings.place !== 'indoors',
+  });
+}
+
+/** What is written on the issue, as it is. */
+function textsOf(snapshot: Snapshot) {
+  const { introduction, included, excluded, terms, presentation } = snapshot.draft.settings;
+  const { note, issuedBy, client } = snapshot;
+  return { introduction, included, excluded, terms, presentation, note, issuedBy, addressee: { ...client } };
+}
+
+/** Its dates; what they assume of benches, hands and hours stays with the workshop. */
+function programmeOf({ programme }: Snapshot): ClientIssue['programme'] {
+  if (!programme) return null;
+  const { startsOn, finishesOn, offeredOn, workingDays } = programme;
+  return { startsOn, finishesOn, offeredOn, workingDays };
+}
+
+/**
+ * The part of a client's page that an issue froze: nothing in it changes from one reading to the next, and none of it knows what anything cost.
+ * `alternatives` has the figures of each alternative by itself; none where the issue was worked by an earlier reckoning.
+ */
+export function presentClientFrozen(snapshot: Snapshot, alternatives: ReadonlyMap<string, Figures>) {
+  const { figures, draft, leafValidUntil } = snapshot;
+  return {
+    ...textsOf(snapshot),
+    leafValidUntil: figures.leaf.length > 0 ? leafValidUntil : null,
+    pieces: presentClientPieces(snapshot, alternatives),
+    buildUps: buildUpsUsed(figures.zones).map(presentBuildUp),
+    price: presentClientPrice(snapshot),
+    alternatives: draft.settings.alternatives.map((one) =>
+      presentClientAlternative(snapshot, one, alternatives.get(one.id)),
+    ),
+    programme: programmeOf(snapshot),
+    isDrying: figures.dry.lots.some((lot) => lot.drying_minutes > 0),
+    cautions: clientCautions({ findings: figures.findings, isRestoration: draft.settings.restoration }),
+    care: careOf(snapshot),
+  };
+}
+
+export type ClientFrozen = ReturnType<typeof presentClientFrozen>;

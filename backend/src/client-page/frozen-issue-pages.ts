@@ -1,0 +1,47 @@
+import type { Figures } from '#shared/estimates/figures';
+import { Rejection } from '#shared/problems/rejection';
+import type { ClientIssueRows } from '../agreements';
+import type { Estimates } from '../estimates';
+import { presentClientFrozen, type ClientFrozen } from './client-frozen-presenter';
+
+/** So many issues are kept ready; the one that was read longest ago gives way. */
+const most = 200;
+
+/**
+ * What an issue froze, as its client reads it. Working its alternatives takes as long as working the estimate so many times, and gives the
+ * same to every reader: it is done once, and kept by the fingerprint of what was frozen.
+ */
+export class FrozenIssuePages {
+  private readonly pages = new Map<string, Promise<ClientFrozen>>();
+
+  constructor(private readonly frozen: Pick<Estimates['frozen'], 'chosen'>) {}
+
+  /** The page of an issue its reader may see: whether they may is asked before. */
+  of(issue: ClientIssueRows): Promise<ClientFrozen> {
+    const key = `${issue.row.workshopId} ${issue.row.id} ${issue.row.sha256}`;
+    const page = this.pages.get(key) ?? this.made(issue);
+    this.pages.delete(key);
+    this.pages.set(key, page);
+    page.catch(() => this.pages.delete(key));
+    const [oldest] = this.pages.keys();
+    if (this.pages.size > most && oldest !== undefined) this.pages.delete(oldest);
+    return page;
+  }
+
+  private async made(issue: ClientIssueRows): Promise<ClientFrozen> {
+    return presentClientFrozen(issue.snapshot, await this.alternatives(issue));
+  }
+
+  /** Each alternative worked by itself from what was frozen; one that cannot be taken alone is shown without its strips. */
+  private async alternatives(issue: ClientIssueRows): Promise<Map<string, Figures>> {
+    const worked = new Map<string, Figures>();
+    for (const { id } of issue.snapshot.draft.settings.alternatives) {
+      const chosen = await this.frozen.chosen(issue, [id]).catch((error: unknown) => {
+        if (error instanceof Rejection && error.kind === 'conflict') return undefined;
+        throw error;
+      });
+      if (chosen) worked.set(id, chosen.figures);
+    }
+    return worked;
+  }
+}

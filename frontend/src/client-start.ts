@@ -1,0 +1,18 @@
+import { loadTranslations } from '@angular/localize';
+import { config } from 'zod/v4/core';
+import { languageFor, languages } from './words/languages';
+
+/** The words come first, as in `main.ts`. */
+export async function start(): Promise<void> {
+  // zod would otherwise try to make functions out of text, which the page's policy forbids.
+  config({ jitless: true });
+  const language = languageFor(navigator.languages);
+  const [catalogue, templates] = await Promise.all([
+    languages[language].catalogue(),
+    languages[language].templates?.(),
+  ]);
+  if (templates) loadTranslations({ ...templates });
+  document.documentElement.lang = language;
+  const { bootstrapClient } = await import('./app/client-bootstrap');
+  await bootstrapClient(catalogue);
+}
