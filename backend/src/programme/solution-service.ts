@@ -28,7 +28,7 @@ interface Parts {
 }
 
 const taskKind = 'programme';
-/** Of one workshop: while it is planned all other tasks of the process wait, letters of every workshop among them. */
+/** Of one workshop: a process plans one after another, and other workshops want their turn. */
 const mostRunning = 3;
 const enough = (): Rejection => new Rejection('too-many', 'programme-planning-enough', { retryAfter_seconds: 60 });
 
@@ -69,7 +69,7 @@ function searchOf(
 /** Planning on the server: asked for, worked out behind the scenes in a thread, told of while it goes on, stopped, and kept. */
 export class SolutionService {
   constructor(private readonly parts: Parts) {
-    parts.tasks.register<{ id: string }>(taskKind, ({ id }, task) => this.work(id, task));
+    parts.tasks.register<{ id: string }>(taskKind, ({ id }, task) => this.work(id, task), { isLong: true });
   }
 
   /** Begins to plan; whoever asks again while that goes on is told of the same. */

@@ -39,7 +39,7 @@ const isRunning = ({ card, row }: KnownEffects): boolean =>
 /** What a card would do to the open estimates: asked for, worked out behind the scenes, kept with the version it belongs to. */
 export class CardEffectsService {
   constructor(private readonly parts: Parts) {
-    parts.tasks.register<EffectsRun>(taskKind, (run, task) => this.work(run, task));
+    parts.tasks.register<EffectsRun>(taskKind, (run, task) => this.work(run, task), { isLong: true });
   }
 
   async known(workshopId: string, rateCardId: string): Promise<KnownEffects> {

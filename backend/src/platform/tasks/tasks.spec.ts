@@ -119,6 +119,92 @@ test('several workers share the work without waiting for one another', async () 
   expect(new Set(seen.map((line) => line.at(-1))).size).toBeGreaterThan(1);
 });
 
+describe('a worker that was started', () => {
+  /** A task that goes on until it is let go. */
+  const held = () => {
+    let letGo = (): void => undefined;
+    const gone = new Promise<void>((resolve) => (letGo = resolve));
+    return { gone, letGo };
+  };
+  const until = async (holds: () => boolean): Promise<void> => {
+    for (let look = 0; look < 400 && !holds(); look++) await pause(25);
+    expect(holds()).toBe(true);
+  };
+  afterEach(() => tasks.stop());
+
+  test('does what is short beside what takes long, and each long kind beside the others', async () => {
+    const { gone, letGo } = held();
+    const seen: string[] = [];
+    const long = (name: string) => async () => {
+      seen.push(`${name} begins`);
+      await gone;
+      seen.push(`${name} ends`);
+    };
+    tasks.register('plan', long('plan'), { isLong: true });
+    tasks.register('reckon', long('reckon'), { isLong: true });
+    tasks.register<{ n: number }>('letter', ({ n }) => Promise.resolve(void seen.push(`letter ${n}`)));
+    for (const kind of ['plan', 'plan', 'reckon']) await add(kind, {});
+    tasks.start();
+    await until(() => seen.length === 2);
+    expect([...seen].sort()).toEqual(['plan begins', 'reckon begins']);
+    for (const n of [1, 2]) await add('letter', { n });
+    await until(() => seen.length === 4);
+    expect(seen.slice(2)).toEqual(['letter 1', 'letter 2']);
+    letGo();
+    await until(() => seen.length === 8);
+    expect(seen.filter((line) => line.startsWith('plan'))).toEqual([
+      ...['plan begins', 'plan ends'],
+      ...['plan begins', 'plan ends'],
+    ]);
+    expect(await waiting()).toBe(0);
+  });
+
+  test('keeps its attempts apart: a long task that fails is put off, and the short ones go on', async () => {
+    const seen: string[] = [];
+    const fail = (): Promise<void> => {
+      seen.push('plan');
+      return Promise.reject(new Error('no plan'));
+    };
+    tasks.register('plan', fail, { isLong: true });
+    tasks.register('letter', () => Promise.resolve(void seen.push('letter')));
+    await add('plan', {});
+    await add('letter', {});
+    tasks.start();
+    await until(() => seen.length === 2);
+    await tasks.stop();
+    expect(await database.select('SELECT kind, attempts, last_error AS lastError FROM tasks')).toEqual([
+      { kind: 'plan', attempts: 1, lastError: 'no plan' },
+    ]);
+  });
+
+  test('stops once each has done what it has in hand, and leaves the rest to the next', async () => {
+    const { gone, letGo } = held();
+    const seen: string[] = [];
+    const work = (kind: string) => async () => {
+      seen.push(kind);
+      await gone;
+      await database.execute('INSERT INTO done (task) VALUES (:kind)', { kind });
+    };
+    tasks.register('plan', work('plan'), { isLong: true });
+    tasks.register('letter', work('letter'));
+    for (const kind of ['plan', 'plan', 'letter', 'letter']) await add(kind, {});
+    tasks.start();
+    await until(() => seen.length === 2);
+    let isStopped = false;
+    const stopped = tasks.stop().then(() => (isStopped = true));
+    await pause(100);
+    expect(isStopped).toBe(false);
+    letGo();
+    await stopped;
+    expect(seen.sort()).toEqual(['letter', 'plan']);
+    expect(await database.select('SELECT task FROM done ORDER BY task')).toEqual([
+      { task: 'letter' },
+      { task: 'plan' },
+    ]);
+    expect(await waiting()).toBe(2);
+  });
+});
+
 test('a worker that is killed loses nothing: what it had in hand is done by the next', async () => {
   for (let n = 0; n < 40; n++) await add('recorded', { n });
   for (let kill = 0; kill < 3; kill++) {

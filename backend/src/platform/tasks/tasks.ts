@@ -36,19 +36,29 @@ export type TaskHandler<Content> = (content: Content, task: Task<Content>) => Pr
 
 const mostAttempts = 12;
 const pause_milliseconds = 1_000;
+/** Tasks looked at for one that no other worker has in hand: more than there are workers. */
+const looked = 50;
 
 /** 10 s, 20 s, 40 s … up to six hours between attempts, a tenth more or less by chance so that failures do not march in step. */
 const backOff_milliseconds = (attempts: number): number =>
   Math.min(100 * 2 ** (attempts - 1), 6 * 36_000) * randomInt(90, 110);
 
+/** Kinds of work that wait for one another: all short ones together, each long one by itself. */
+interface Lane {
+  readonly kinds: string[];
+  round: Promise<void> | undefined;
+}
+
 /**
  * Work that outlives its request. `add` writes it in the running transaction, so it happens exactly if the business step does; a
  * worker takes one row at a time (SKIP LOCKED, so several servers may), runs it in a transaction of its own, and strikes it off there.
+ * Kinds that take long have a worker each, so that no letter waits for a plan; each holds one connection while it works.
  */
 export class Tasks {
   private readonly handlers = new Map<string, TaskHandler<never>>();
+  private readonly lanes: [Lane, ...Lane[]] = [{ kinds: [], round: undefined }];
   private timer: NodeJS.Timeout | undefined;
-  private round: Promise<void> = Promise.resolve();
+  private isStopping = false;
 
   constructor(
     private readonly database: Database,
@@ -56,9 +66,11 @@ export class Tasks {
     private readonly log: Log,
   ) {}
 
-  /** Says who does the work of a kind; a handler may run twice, so it must not mind. */
-  register<Content>(kind: string, handler: TaskHandler<Content>): void {
+  /** Says who does the work of a kind, and whether it takes long; a handler may run twice, so it must not mind. */
+  register<Content>(kind: string, handler: TaskHandler<Content>, { isLong = false } = {}): void {
     this.handlers.set(kind, handler);
+    if (isLong) this.lanes.push({ kinds: [kind], round: undefined });
+    else this.lanes[0].kinds.push(kind);
   }
 
   async add(task: NewTask): Promise<string> {
@@ -81,22 +93,25 @@ export class Tasks {
   }
 
   start(): void {
-    this.timer = setInterval(() => {
-      this.round = this.round.then(() => this.runDue());
-    }, pause_milliseconds);
+    this.isStopping = false;
+    const look = (lane: Lane): void => {
+      lane.round ??= this.runDue(lane.kinds).finally(() => (lane.round = undefined));
+    };
+    this.timer = setInterval(() => this.lanes.forEach(look), pause_milliseconds);
     this.timer.unref();
   }
 
-  /** Ends the worker once the task in hand is done. */
+  /** Ends every worker once the task it has in hand is done; what is due besides waits for the next start. */
   async stop(): Promise<void> {
     clearInterval(this.timer);
-    await this.round;
+    this.isStopping = true;
+    await Promise.all(this.lanes.map(({ round }) => round));
   }
 
-  /** Runs whatever is due, one after the other, until nothing is left; answers how many ran. */
-  async runDue(): Promise<void> {
+  /** Runs whatever is due of some kinds, of all where none are named, one after the other until nothing is left. */
+  async runDue(kinds: readonly string[] = [...this.handlers.keys()]): Promise<void> {
     try {
-      while (await outsideTransaction(() => this.runOne()));
+      while (!this.isStopping && (await outsideTransaction(() => this.runOne(kinds))));
     } catch (error) {
       this.log.error({ error }, 'the tasks could not be read');
     }
@@ -128,11 +143,11 @@ export class Tasks {
     return taken > 0;
   }
 
-  private async runOne(): Promise<boolean> {
+  private async runOne(kinds: readonly string[]): Promise<boolean> {
     const failure: { task?: Task; error?: unknown } = {};
     const ran = await this.database
       .transaction(async () => {
-        const task = await this.take();
+        const task = await this.take(kinds);
         if (!task) return false;
         failure.task = task;
         await this.perform(task);
@@ -148,13 +163,26 @@ export class Tasks {
     return ran;
   }
 
-  private async take(): Promise<Task | undefined> {
-    const [task] = await this.database.select<Task>(
-      `SELECT id, workshop_id AS workshopId, kind, content, attempts FROM tasks
-       WHERE failed_at IS NULL AND run_after <= :now AND kind IN (:kinds) ORDER BY run_after, id LIMIT 1 FOR UPDATE SKIP LOCKED`,
-      { now: this.clock.now(), kinds: [...this.handlers.keys(), ''] },
+  /**
+   * Locks the first task that is due and in nobody's hands. What is due is read first, and then locked by its id alone: a locking search would hold every row
+   * it passes, those of other kinds among them, for as long as the task takes.
+   */
+  private async take(kinds: readonly string[]): Promise<Task | undefined> {
+    const now = this.clock.now();
+    const due = await this.database.select<{ id: string }>(
+      `SELECT id FROM tasks WHERE failed_at IS NULL AND run_after <= :now AND kind IN (:kinds)
+       ORDER BY run_after, id LIMIT ${String(looked)}`,
+      { now, kinds: [...kinds, ''] },
     );
-    return task;
+    for (const { id } of due) {
+      const [task] = await this.database.select<Task>(
+        `SELECT id, workshop_id AS workshopId, kind, content, attempts FROM tasks
+         WHERE id = :id AND failed_at IS NULL AND run_after <= :now FOR UPDATE SKIP LOCKED`,
+        { id, now },
+      );
+      if (task) return task;
+    }
+    return undefined;
   }
 
   private async perform(task: Task): Promise<void> {
