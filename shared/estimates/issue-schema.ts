@@ -3,6 +3,7 @@ import { issueStates } from '#shared/estimates/issue-state';
 import type { LineDifference } from '#shared/estimates/line-differences';
 import { workKinds } from '#shared/estimates/price/work-kind';
 import { day, paragraphs } from '#shared/problems/entry-schema';
+import { findingSchema } from '#shared/words/reason-schema';
 
 /** What a person says when issuing: a note, and whether a rate card no longer in force is meant. */
 export const issueRequestSchema = z.strictObject({
@@ -40,6 +41,16 @@ export const pricedIssueSummarySchema = issueSummarySchema.extend({
 });
 export type IssueSummary = z.infer<typeof issueSummarySchema>;
 export type PricedIssueSummary = z.infer<typeof pricedIssueSummarySchema>;
+
+/** The dates an issue was made with: the earliest start, how long it takes, the day that is offered, and what they assume. */
+export const frozenDatesSchema = z.strictObject({
+  startsOn: day,
+  finishesOn: day,
+  offeredOn: day,
+  workingDays: z.int(),
+  assumptions: z.array(findingSchema),
+});
+export type FrozenDates = z.infer<typeof frozenDatesSchema>;
 
 /** A line in which two issues (or an issue and the draft) differ. */
 export const lineDifferenceSchema = z.strictObject({

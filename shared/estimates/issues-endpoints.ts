@@ -1,6 +1,7 @@
 import * as z from 'zod';
 import { endpoint, sameForPriced } from '#shared/actor/endpoint';
 import {
+  frozenDatesSchema,
   issueMarkSchema,
   issueRequestSchema,
   lineDifferenceSchema,
@@ -51,6 +52,8 @@ const frozen = {
   summary: pricedIssueSummarySchema,
   differences: z.array(lineDifferenceSchema),
   alternatives: z.array(alternativeTotalSchema),
+  /** Null where nothing was planned when it was issued. */
+  dates: frozenDatesSchema.nullable(),
 };
 
 export const readIssue = endpoint({

@@ -14,6 +14,7 @@ import type { BenchTask } from '#shared/programme/bench-task';
 import type { BoardAnswer } from '#shared/programme/board-schema';
 import { planDifferences } from '#shared/programme/plan-differences';
 import type { Programme } from '#shared/programme/programme-plan';
+import { readIssue } from '#shared/estimates/issues-endpoints';
 import { removeJob } from '#shared/jobs/jobs-endpoints';
 import {
   holdSlot,
@@ -334,6 +335,20 @@ describe('The board', () => {
     await later.signIn(api.ours.people.owner.email, password);
     expect((await board(later)).jobs).toEqual([]);
     expect((await told<ProgrammeAnswer>(later, readProgramme, at(estimateId))).hold).toBeNull();
+  });
+});
+
+describe('An issue that was made with a plan', () => {
+  test('tells the office the dates its client sees and what they assume; one without a plan has none', async () => {
+    const { estimateId, programme } = await plannedSample(api.ours, api.ours.people.bench);
+    const { id } = await markedIssue(api.ours, api, { estimateId, state: 'sent' });
+    const dates = (await told<{ dates: unknown }>(api.as('office'), readIssue, { params: { issueId: id } })).dates;
+    expect(dates).toEqual(programme.dates);
+    expect(programme.dates?.assumptions.length).toBeGreaterThan(0);
+    const other = await sampleEstimate(api.ours);
+    const unplanned = await markedIssue(api.ours, api, { estimateId: other.estimateId, state: 'sent' });
+    const frozen = await owner.call(readIssue, { params: { issueId: unplanned.id } });
+    expect((frozen.body as { dates: unknown }).dates).toBeNull();
   });
 });
 

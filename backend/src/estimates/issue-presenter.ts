@@ -1,4 +1,5 @@
-import type { PricedIssueSummary } from '#shared/estimates/issue-schema';
+import type { FrozenDates, PricedIssueSummary } from '#shared/estimates/issue-schema';
+import type { Snapshot } from '#shared/estimates/snapshot';
 import type { IssueRow } from './issue-model';
 
 export const presentIssue = (row: IssueRow): PricedIssueSummary => ({
@@ -18,3 +19,10 @@ export const presentIssue = (row: IssueRow): PricedIssueSummary => ({
   tax_minor: row.taxMinor,
   gross_minor: row.grossMinor,
 });
+
+/** The dates an issue speaks of with what they assume; null where nothing was planned. */
+export function presentFrozenDates({ programme }: Snapshot): FrozenDates | null {
+  if (!programme) return null;
+  const { startsOn, finishesOn, offeredOn, workingDays, assumptions } = programme;
+  return { startsOn, finishesOn, offeredOn, workingDays, assumptions: assumptions as FrozenDates['assumptions'] };
+}

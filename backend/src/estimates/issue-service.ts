@@ -19,7 +19,7 @@ import { frozenSnapshot, thawedSnapshot, wholeOfSnapshot } from './frozen-snapsh
 import type { IssueRow } from './issue-model';
 import type { PaperMaker } from './paper-maker';
 import { mayBeIssued, mayBeMarked } from './issue-policy';
-import { presentIssue } from './issue-presenter';
+import { presentFrozenDates, presentIssue } from './issue-presenter';
 import type { IssueRepository } from './issue-repository';
 import { snapshotOf, snapshotWorkshop } from './snapshot-of';
 import type { WholeEstimate } from './whole-estimate';
@@ -133,6 +133,7 @@ export class IssueService {
       summary: presentIssue(row),
       differences: before ? lineDifferences(namedLines(thawedSnapshot(before)), namedLines(snapshot)) : [],
       alternatives: [...snapshot.alternatives],
+      dates: presentFrozenDates(snapshot),
       estimate: presentEstimate(whole, snapshot.figures, audienceOf(actor.roles)) as CostedEstimate | PricedEstimate,
     };
   }
