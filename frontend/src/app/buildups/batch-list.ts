@@ -34,52 +34,7 @@ import { Formats } from '../core/formats/formats';
       </tbody>
     </table>
   `,
-  styles: `
-    :host {
-      display: block;
-      min-width: 0;
-      overflow-x: auto;
-    }
-
-    table {
-      width: 100%;
-      border-collapse: collapse;
-    }
-
-    caption {
-      padding-bottom: 8px;
-      font: 500 1.125rem/1.5rem var(--heading);
-      text-align: left;
-    }
-
-    th,
-    td {
-      padding: 6px 10px;
-      border-top: 1px solid var(--line);
-      font-weight: 400;
-      text-align: left;
-      vertical-align: top;
-    }
-
-    thead th {
-      border: 0;
-      color: var(--muted);
-      font-size: 0.9375rem;
-      font-weight: 500;
-    }
-
-    .minor {
-      display: block;
-      color: var(--muted);
-      font-size: 0.875rem;
-      line-height: 1.125rem;
-    }
-
-    .end {
-      text-align: right;
-      white-space: nowrap;
-    }
-  `,
+  styleUrl: './batch-list.scss',
 })
 export class BatchList {
   private readonly formats = inject(Formats);

@@ -22,6 +22,7 @@ import { newId } from '../core/new-id';
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
 import { focusFirst } from '../ui/field/focus-first';
+import { TextField } from '../ui/field/text-field';
 import { ClientCalls } from './client-calls';
 import { clientDifferences } from './client-differences';
 import { clientKindNames } from './client-kind-names';
@@ -35,7 +36,7 @@ const nothing: ClientContent = {
 /** Enters a client or changes one. */
 @Component({
   selector: 'app-client-form',
-  imports: [Entry, Field, KeptFoot, ReactiveFormsModule],
+  imports: [Entry, Field, KeptFoot, ReactiveFormsModule, TextField],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './client-form.html',
 })

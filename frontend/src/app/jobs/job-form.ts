@@ -4,9 +4,8 @@ import { jobContentSchema, jobKinds, jobSchema, type Job } from '#shared/jobs/jo
 import { holdWhileDirty } from '../core/forms/hold-while-dirty';
 import { RowForm } from '../core/forms/row-form';
 import { newId } from '../core/new-id';
-import { Entry } from '../ui/field/entry';
-import { Field } from '../ui/field/field';
 import { focusFirst } from '../ui/field/focus-first';
+import { TextField } from '../ui/field/text-field';
 import { ClientField } from './client-field';
 import { JobCalls } from './job-calls';
 import { jobDifferences } from './job-differences';
@@ -18,7 +17,7 @@ const nothing = { title: '', clientId: null, kind: 'new', reference: '', site: '
 /** Opens a job or changes what is known of one. */
 @Component({
   selector: 'app-job-form',
-  imports: [ClientField, Entry, Field, KeptFoot, ReactiveFormsModule],
+  imports: [ClientField, KeptFoot, ReactiveFormsModule, TextField],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './job-form.html',
 })
