@@ -153,6 +153,16 @@ export const invoiceSchema = invoiceSummarySchema.extend({
   rounding_minor: z.int(),
   totals: invoiceTotalsSchema,
   findings: z.array(findingSchema),
+  /** What was given up of it, why, when and by whom. */
+  writeOffs: z.array(
+    z.strictObject({
+      id: z.uuid(),
+      amount_minor: z.int(),
+      reason: z.string(),
+      writtenOn: z.string(),
+      byName: z.string(),
+    }),
+  ),
   sha256: z.string().nullable(),
   papers: z.array(z.enum(['invoice.pdf', 'invoice.xml'])),
 });

@@ -17,6 +17,10 @@ export interface LedgerEntry {
   readonly clientName: string;
   /** Of the paper, or what was noted of a payment. */
   readonly number: string;
+  /** Why, where somebody had to say so; for the workshop and its accountant, never for the client. */
+  readonly note: string;
+  /** ISO 4217. */
+  readonly currency: string;
   readonly net_minor: MinorUnits;
   readonly tax_minor: MinorUnits;
   readonly rounding_minor: MinorUnits;

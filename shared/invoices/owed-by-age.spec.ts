@@ -37,7 +37,7 @@ describe('the age of what is owed', () => {
 });
 
 const entry = (day: string, kind: LedgerEntry['kind'], amount_minor: number): LedgerEntry => ({
-  ...{ id: `${day} ${kind}`, day, kind, clientId: 'a', clientName: 'A', number: '1' },
+  ...{ id: `${day} ${kind}`, day, kind, clientId: 'a', clientName: 'A', number: '1', note: '', currency: 'EUR' },
   ...{ net_minor: 0, tax_minor: 0, rounding_minor: 0, amount_minor },
 });
 
@@ -67,6 +67,7 @@ describe('a statement', () => {
       ['credit-note', 0],
       ['payment', -340],
       ['refund', 40],
+      ['dispute', 0],
       ['write-off', 0],
     ]);
   });

@@ -3,7 +3,7 @@ import { endpoint, sameForPriced } from '#shared/actor/endpoint';
 import { oneInvoice } from '#shared/invoices/invoices-endpoints';
 import {
   journalSchema,
-  owedSchema,
+  owedInCurrencySchema,
   periodQuery,
   statementLetterSchema,
   statementSchema,
@@ -18,9 +18,7 @@ export const readOwed = endpoint({
   method: 'get',
   path: '/api/owed',
   callers: ['owner', 'estimator', 'office'],
-  answers: sameForPriced(
-    z.strictObject({ day: z.string(), currency: z.string(), items: z.array(owedSchema), open_minor: z.int() }),
-  ),
+  answers: sameForPriced(z.strictObject({ day: z.string(), currencies: z.array(owedInCurrencySchema) })),
 });
 
 export const readStatement = endpoint({

@@ -80,6 +80,14 @@ export const owedSchema = z.strictObject({
   credit_minor: z.int(),
 });
 
+/** What is owed in one currency. */
+export const owedInCurrencySchema = z.strictObject({
+  currency: z.string(),
+  items: z.array(owedSchema),
+  open_minor: z.int(),
+});
+export type OwedInCurrency = z.infer<typeof owedInCurrencySchema>;
+
 const entryShape = {
   id: z.uuid(),
   day: z.string(),
@@ -93,27 +101,37 @@ const entryShape = {
   amount_minor: z.int(),
 };
 
+/** A client's account, each currency by itself. A workshop that changed its currency has old invoices in another. */
 export const statementSchema = z.strictObject({
-  currency: z.string(),
   clientName: z.string(),
   from: z.string(),
   to: z.string(),
-  opening_minor: z.int(),
-  lines: z.array(z.strictObject({ ...entryShape, balance_minor: z.int() })),
-  closing_minor: z.int(),
+  currencies: z.array(
+    z.strictObject({
+      currency: z.string(),
+      opening_minor: z.int(),
+      lines: z.array(z.strictObject({ ...entryShape, balance_minor: z.int() })),
+      closing_minor: z.int(),
+    }),
+  ),
 });
 export type Statement = z.infer<typeof statementSchema>;
 
 const totalShape = { net_minor: z.int(), tax_minor: z.int(), rounding_minor: z.int(), amount_minor: z.int() };
 
 export const journalSchema = z.strictObject({
-  currency: z.string(),
   from: z.string(),
   to: z.string(),
-  entries: z.array(z.strictObject(entryShape)),
-  totals: z.array(z.strictObject({ kind: z.enum(ledgerKinds), count: z.int(), ...totalShape })),
+  currencies: z.array(
+    z.strictObject({
+      currency: z.string(),
+      entries: z.array(z.strictObject({ ...entryShape, note: z.string() })),
+      totals: z.array(z.strictObject({ kind: z.enum(ledgerKinds), count: z.int(), ...totalShape })),
+    }),
+  ),
 });
 export type Journal = z.infer<typeof journalSchema>;
+export type JournalInCurrency = Journal['currencies'][number];
 
 const period = { from: day, to: day };
 const isInOrder = ({ from, to }: { from: string; to: string }): boolean => from <= to;

@@ -49,7 +49,7 @@ const ask = async (checkoutId: string): Promise<Checkout> =>
 const openOf = async (invoiceId: string) => (await readBack(api.ours, invoiceId)).open_minor;
 const paymentsOf = async (clientId: string): Promise<Payment[]> =>
   ((await api.as('office').call(listPayments, { query: { clientId } })).body as { items: Payment[] }).items;
-const entriesOf = (journal: unknown) => (journal as Journal).entries;
+const entriesOf = (journal: unknown) => (journal as Journal).currencies.flatMap(({ entries }) => entries);
 const rowsOf = async () => {
   const [row] = await api.platform.database.select<{ events: number; payments: number }>(
     'SELECT (SELECT COUNT(*) FROM payment_events) AS events, (SELECT COUNT(*) FROM payments) AS payments',

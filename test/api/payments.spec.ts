@@ -1,7 +1,9 @@
 import { randomUUID } from 'node:crypto';
 import { Workbook } from 'exceljs';
 import { v7 as newId } from 'uuid';
-import type { Journal, Payment, Statement } from '#shared/invoices/payment-schema';
+import { changeWorkshop, readWorkshop } from '#shared/accounts/workshop-endpoints';
+import type { Workshop } from '#shared/accounts/workshop-schema';
+import type { Journal, OwedInCurrency, Payment, Statement } from '#shared/invoices/payment-schema';
 import {
   readJournal,
   readJournalList,
@@ -181,18 +183,17 @@ describe('what is owed', () => {
   it('agrees by client and age, in statement and journal, to the cent', async () => {
     const sample = await sampleInvoice(api.ours);
     await pay(await entryFor(sample, 2_000));
-    const owed = (await api.as('office').call(readOwed)).body as {
-      items: { clientId: string; open_minor: number }[];
-      open_minor: number;
-    };
+    const { currencies } = (await api.as('office').call(readOwed)).body as { currencies: OwedInCurrency[] };
+    const [owed] = currencies;
     expect(owed.items.find(({ clientId }) => clientId === sample.clientId)).toMatchObject({
       open_minor: 10_000,
       byAge_minor: { 'not-due': 10_000 },
     });
     const call = { params: { clientId: sample.clientId }, query: wide };
     const statement = (await api.as('office').call(readStatement, call)).body as Statement;
-    expect(statement).toMatchObject({ opening_minor: 0, closing_minor: 10_000 });
-    expect(statement.lines.map(({ kind, balance_minor }) => [kind, balance_minor])).toEqual([
+    const [account] = statement.currencies;
+    expect(account).toMatchObject({ opening_minor: 0, closing_minor: 10_000 });
+    expect(account.lines.map(({ kind, balance_minor }) => [kind, balance_minor])).toEqual([
       ['invoice', 12_000],
       ['payment', 10_000],
     ]);
@@ -203,8 +204,78 @@ describe('what is owed', () => {
       .parse(binary as never);
     expect((paper.body as Buffer).subarray(0, 5).toString()).toBe('%PDF-');
     const journal = (await api.as('office').call(readJournal, { query: wide })).body as Journal;
-    const credit = owed.items.reduce((sum, one) => sum + (one as unknown as { credit_minor: number }).credit_minor, 0);
-    expect(journal.totals.reduce((sum, { amount_minor }) => sum + amount_minor, 0)).toBe(owed.open_minor - credit);
+    const credit = owed.items.reduce((sum, one) => sum + one.credit_minor, 0);
+    expect(journal.currencies[0].totals.reduce((sum, { amount_minor }) => sum + amount_minor, 0)).toBe(
+      owed.open_minor - credit,
+    );
+  });
+
+  it('stays in the currency it was invoiced in where the workshop changes its own, and is never added to another', async () => {
+    const workshop = api.theirs;
+    const own = workshop.people.owner.visitor;
+    const old = await sampleInvoice(workshop);
+    const { version, logoFileId: _logo, id: _id, ...settings } = (await own.call(readWorkshop)).body as Workshop;
+    const changed = await own.call(changeWorkshop, { body: { ...settings, currency: 'SEK' }, version });
+    expect(changed.status).toBe(200);
+    const fresh = await sampleInvoice(workshop, { clientId: old.clientId });
+    const owed = (await own.call(readOwed)).body as { currencies: OwedInCurrency[] };
+    expect(owed.currencies.map(({ currency, open_minor }) => [currency, open_minor])).toEqual([
+      ['SEK', 12_000],
+      ['EUR', 12_000],
+    ]);
+    const body = { amount_minor: 2_000, reason: 'A scratch on the plinth' };
+    const key = randomUUID();
+    expect((await own.call(writeOff, { params: { invoiceId: old.invoiceId }, body, key })).status).toBe(200);
+    const call = { params: { clientId: old.clientId }, query: wide };
+    const statement = await own.call(readStatement, call);
+    expect(
+      (statement.body as Statement).currencies.map(({ currency, closing_minor }) => [currency, closing_minor]),
+    ).toEqual([
+      ['SEK', 12_000],
+      ['EUR', 10_000],
+    ]);
+    // Why something was given up is between the workshop and its accountant.
+    expect(statement.text).not.toContain('scratch');
+    const journal = (await own.call(readJournal, { query: wide })).body as Journal;
+    const sums = journal.currencies.map(({ currency, totals }) => [
+      currency,
+      totals.reduce((sum, { amount_minor }) => sum + amount_minor, 0),
+    ]);
+    expect(sums).toEqual([
+      ['SEK', 12_000],
+      ['EUR', 10_000],
+    ]);
+    const notes = journal.currencies.flatMap(({ entries }) => entries.map(({ note }) => note)).filter(Boolean);
+    expect(notes).toEqual([expect.stringMatching(/^A scratch on the plinth \(.+\)$/)]);
+    const workbook = new Workbook();
+    const file = await own
+      .call(readJournalWorkbook, { query: wide })
+      .buffer(true)
+      .parse(binary as never);
+    await workbook.xlsx.load(file.body as never);
+    expect(workbook.worksheets.map(({ name }) => name)).toEqual(['Journal SEK', 'Journal EUR']);
+    const csv = (
+      await own
+        .call(readJournalList, { query: wide })
+        .buffer(true)
+        .parse(binary as never)
+    ).body as Buffer;
+    const together = csv
+      .toString('utf8')
+      .split('\r\n')
+      .filter((row) => row.includes('Together'));
+    expect(together.map((row) => row.split(',').filter(Boolean))).toEqual([
+      ['Totals', 'Together', 'SEK', '100', '20', '0', '120'],
+      ['Totals', 'Together', 'EUR', '100', '20', '0', '100'],
+    ]);
+    const paper = await own
+      .call(readStatementPaper, call)
+      .buffer(true)
+      .parse(binary as never);
+    expect((paper.body as Buffer).subarray(0, 5).toString()).toBe('%PDF-');
+    const invoice = await readBack(workshop, old.invoiceId);
+    expect(invoice.writeOffs).toMatchObject([{ amount_minor: 2_000, reason: body.reason }]);
+    expect((await readBack(workshop, fresh.invoiceId)).currency).toBe('SEK');
   });
 
   it('goes to the accountant as a list and a workbook whose sums are those of the entries, and no text is a formula', async () => {
@@ -234,7 +305,7 @@ describe('what is owed', () => {
     const workbook = new Workbook();
     await workbook.xlsx.load((await file(readJournalWorkbook)).body as never);
     const [sheet] = workbook.worksheets;
-    const last = sheet.getRow(sheet.rowCount).getCell(8).value as { formula: string; result: number };
+    const last = sheet.getRow(sheet.rowCount).getCell(10).value as { formula: string; result: number };
     expect(last.formula).toMatch(/^SUM\(/);
     expect(Math.round(last.result * 100)).toBe(cents(entries));
   });

@@ -1,7 +1,7 @@
 import type { Invoice, InvoiceSummary } from '#shared/invoices/invoice-schema';
 import type { Checkout, Payment } from '#shared/invoices/payment-schema';
 import type { InvoiceRow } from './invoice-model';
-import type { CheckoutRow, PaymentRow } from './payment-model';
+import type { CheckoutRow, PaymentRow, WriteOffRow } from './payment-model';
 
 interface Facts {
   readonly clientName: string;
@@ -42,7 +42,11 @@ const papersOf = ({ pdfFileId, xmlFileId }: InvoiceRow): Invoice['papers'] => [
 export const presentInvoice = (
   row: InvoiceRow,
   facts: Facts,
-  worked: Pick<Invoice, 'rounding_minor'> & { readonly totals: object; readonly findings: readonly object[] },
+  worked: Pick<Invoice, 'rounding_minor'> & {
+    readonly totals: object;
+    readonly findings: readonly object[];
+    readonly writeOffs: readonly WriteOffRow[];
+  },
 ): Invoice => ({
   ...presentSummary(row, facts),
   content: row.content as Invoice['content'],
@@ -50,6 +54,9 @@ export const presentInvoice = (
   rounding_minor: worked.rounding_minor,
   totals: worked.totals as Invoice['totals'],
   findings: [...worked.findings] as Invoice['findings'],
+  writeOffs: worked.writeOffs.map(({ id, amountMinor: amount_minor, reason, writtenOn, byName }) => {
+    return { id, amount_minor, reason, writtenOn, byName };
+  }),
   sha256: row.sha256,
   papers: papersOf(row),
 });

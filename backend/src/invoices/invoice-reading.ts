@@ -61,11 +61,12 @@ export class InvoiceReading {
     const facts = { clientName: client.name, today: await todayIn(this.parts, workshopId) };
     if (row.state === 'issued') {
       const { totals, rounding_minor } = thawedInvoice(row);
-      return presentInvoice(row, facts, { totals, rounding_minor, findings: [] });
+      const writeOffs = await this.parts.payments.writeOffsOf(workshopId, row.id);
+      return presentInvoice(row, facts, { totals, rounding_minor, findings: [], writeOffs });
     }
     const hand = await this.parts.issuing.inHand(row, await this.parts.settings.read(workshopId));
     const { totals, rounding_minor } = hand.worked;
-    return presentInvoice(row, facts, { totals, rounding_minor, findings: invoiceFindings(hand) });
+    return presentInvoice(row, facts, { totals, rounding_minor, findings: invoiceFindings(hand), writeOffs: [] });
   }
 
   /** A paper as it was kept. */

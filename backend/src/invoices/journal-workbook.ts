@@ -1,5 +1,5 @@
 import { csvText, type CsvCell } from '#shared/documents/csv-text';
-import type { Journal } from '#shared/invoices/payment-schema';
+import type { Journal, JournalInCurrency } from '#shared/invoices/payment-schema';
 import { currencyDigits } from '#shared/money/currency-digits';
 import type { MinorUnits } from '#shared/money/decimal';
 import { sumMinor } from '#shared/money/sum-minor';
@@ -21,27 +21,38 @@ export interface JournalInWords {
   readonly words: PaperWords;
 }
 
-type Amounts = Pick<Journal['totals'][number], 'net_minor' | 'tax_minor' | 'rounding_minor' | 'amount_minor'>;
+type Amounts = Pick<JournalInCurrency['totals'][number], 'net_minor' | 'tax_minor' | 'rounding_minor' | 'amount_minor'>;
+
+/** The entries of one currency and the words they are written in. */
+interface BookInWords {
+  readonly book: JournalInCurrency;
+  readonly words: PaperWords;
+}
 
 const heads = ({ say }: PaperWords): string[] => [
   say('journal-head-day'),
   say('journal-head-kind'),
   say('journal-head-number'),
   say('journal-head-client'),
+  say('journal-head-note'),
+  say('journal-head-currency'),
   say('journal-head-net'),
   say('journal-head-tax'),
   say('journal-head-rounding'),
   say('journal-head-amount'),
 ];
 
+/** Where the four amounts stand. */
+const amountColumns = 'GHIJ';
+
 /** The exact decimal as a figure: at most 13 digits and its decimals, which a figure of this kind holds without loss. */
-const figuresOf = (amounts: Amounts, digits: number): number[] =>
+const figuresOf = (amounts: Amounts, currency: string): number[] =>
   [amounts.net_minor, amounts.tax_minor, amounts.rounding_minor, amounts.amount_minor].map((minor) =>
-    Number(textOf(minor, digits)),
+    Number(textOf(minor, currencyDigits(currency))),
   );
 
-function together(journal: Journal): Amounts {
-  const sum = (pick: (amounts: Amounts) => MinorUnits) => sumMinor(journal.totals.map(pick));
+function together({ totals }: JournalInCurrency): Amounts {
+  const sum = (pick: (amounts: Amounts) => MinorUnits) => sumMinor(totals.map(pick));
   return {
     net_minor: sum((total) => total.net_minor),
     tax_minor: sum((total) => total.tax_minor),
@@ -50,65 +61,77 @@ function together(journal: Journal): Amounts {
   };
 }
 
-/** The journal as comma-separated values: every entry, then the sums of each kind, then all together. */
-export function journalCsv({ journal, words }: JournalInWords): string {
-  const digits = currencyDigits(journal.currency);
-  const entries = journal.entries.map((entry): CsvCell[] => [
-    ...[entry.day, words.say(kindWords[entry.kind]), entry.number, entry.clientName],
-    ...figuresOf(entry, digits),
-  ]);
-  const totals = journal.totals.map((total): CsvCell[] => [
-    ...[words.say('journal-totals'), words.say(kindWords[total.kind]), '', ''],
-    ...figuresOf(total, digits),
-  ]);
-  const all: CsvCell[] = [
-    words.say('journal-totals'),
-    words.say('journal-all'),
-    '',
-    '',
-    ...figuresOf(together(journal), digits),
+const entryTexts = ({ book, words }: BookInWords, entry: JournalInCurrency['entries'][number]): string[] => [
+  ...[entry.day, words.say(kindWords[entry.kind]), entry.number, entry.clientName, entry.note, book.currency],
+];
+
+const totalTexts = ({ book, words }: BookInWords, kind: string): string[] => [
+  ...[words.say('journal-totals'), kind, '', '', '', book.currency],
+];
+
+function bookRows(written: BookInWords): CsvCell[][] {
+  const { book, words } = written;
+  const { currency } = book;
+  return [
+    ...book.entries.map((entry) => [...entryTexts(written, entry), ...figuresOf(entry, currency)]),
+    ...book.totals.map((total) => [
+      ...totalTexts(written, words.say(kindWords[total.kind])),
+      ...figuresOf(total, currency),
+    ]),
+    [...totalTexts(written, words.say('journal-all')), ...figuresOf(together(book), currency)],
   ];
-  return csvText([heads(words), ...entries, ...totals, all]);
 }
+
+/** The journal as comma-separated values: for each currency every entry, then the sums of each kind, then all together. */
+export const journalCsv = ({ journal, words }: JournalInWords): string =>
+  csvText([heads(words), ...journal.currencies.flatMap((book) => bookRows({ book, words }))]);
 
 /** The sums are formulas over the entries, so that whoever changes or filters them sees what it comes to. */
-function addTotals(sheet: Sheet, { journal, words }: JournalInWords, span: { from: number; to: number }): void {
-  const digits = currencyDigits(journal.currency);
+function addTotals(sheet: Sheet, written: BookInWords, span: { from: number; to: number }): void {
+  const { book, words } = written;
   const range = (column: string) => `$${column}$${span.from}:$${column}$${span.to}`;
-  for (const total of journal.totals) {
-    const kind = words.say(kindWords[total.kind]);
-    const sums = figuresOf(total, digits).map((value, place) =>
-      formula(`SUMIF(${range('B')},$B$${sheet.next},${range('EFGH'[place])})`, value),
+  for (const total of book.totals) {
+    const sums = figuresOf(total, book.currency).map((value, place) =>
+      formula(`SUMIF(${range('B')},$B$${sheet.next},${range(amountColumns[place])})`, value),
     );
-    sheet.add([words.say('journal-totals'), kind, '', '', ...sums], 'sum');
+    sheet.add([...totalTexts(written, words.say(kindWords[total.kind])), ...sums], 'sum');
   }
-  const sums = figuresOf(together(journal), digits).map((value, place) =>
-    formula(`SUM(${range('EFGH'[place])})`, value),
+  const sums = figuresOf(together(book), book.currency).map((value, place) =>
+    formula(`SUM(${range(amountColumns[place])})`, value),
   );
-  sheet.add([words.say('journal-totals'), words.say('journal-all'), '', '', ...sums], 'sum');
+  sheet.add([...totalTexts(written, words.say('journal-all')), ...sums], 'sum');
 }
 
-/** The journal as a workbook; the same journal at the same time gives the same bytes. */
+function newSheet(name: string, currency: string): Sheet {
+  const digits = currencyDigits(currency);
+  const format = digits === 0 ? '#,##0' : `#,##0.${'0'.repeat(digits)}`;
+  const texts = [12, 14, 20, 34, 28, 10].map((width) => ({ width, format: '' }));
+  return new Sheet(name, [...texts, ...[14, 14, 12, 14].map((width) => ({ width, format }))]);
+}
+
+function sheetOf(written: BookInWords, name: string, title: string): Sheet {
+  const { book, words } = written;
+  const { currency, entries } = book;
+  const sheet = newSheet(name, currency);
+  sheet.head(title, words.say('journal-note', { currency }), heads(words));
+  const from = sheet.next;
+  for (const entry of entries) sheet.add([...entryTexts(written, entry), ...figuresOf(entry, currency)]);
+  const to = Math.max(from, sheet.next - 1);
+  if (entries.length === 0) sheet.add(['']);
+  addTotals(sheet, written, { from, to });
+  return sheet;
+}
+
+/** The journal as a workbook, a sheet for each currency; the same journal at the same time gives the same bytes. */
 export function journalWorkbook(
   { journal, words }: JournalInWords,
   marks: { author: string; madeAt: Date; paper: 'A4' | 'Letter' },
 ): Promise<Buffer> {
-  const digits = currencyDigits(journal.currency);
-  const format = digits === 0 ? '#,##0' : `#,##0.${'0'.repeat(digits)}`;
-  const texts = [12, 14, 20, 34].map((width) => ({ width, format: '' }));
-  const sheet = new Sheet(words.say('journal-sheet'), [
-    ...texts,
-    ...[14, 14, 12, 14].map((width) => ({ width, format })),
-  ]);
   const title = words.say('journal-title', { from: words.day(journal.from), to: words.day(journal.to) });
-  sheet.head(title, words.say('journal-note', { currency: journal.currency }), heads(words));
-  const from = sheet.next;
-  for (const entry of journal.entries) {
-    const texts4 = [entry.day, words.say(kindWords[entry.kind]), entry.number, entry.clientName];
-    sheet.add([...texts4, ...figuresOf(entry, digits)]);
-  }
-  const to = Math.max(from, sheet.next - 1);
-  if (journal.entries.length === 0) sheet.add(['']);
-  addTotals(sheet, { journal, words }, { from, to });
-  return workbookBytes({ sheets: [sheet], names: new NameBook() }, { title, ...marks });
+  const isSingle = journal.currencies.length === 1;
+  const sheets = journal.currencies.map((book) => {
+    const { currency } = book;
+    return sheetOf({ book, words }, words.say(isSingle ? 'journal-sheet' : 'journal-sheet-in', { currency }), title);
+  });
+  return workbookBytes({ sheets, names: new NameBook() }, { title, ...marks });
 }

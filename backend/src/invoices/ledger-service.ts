@@ -1,8 +1,9 @@
+import { byCurrency } from '#shared/invoices/by-currency';
 import { clientStatement } from '#shared/invoices/client-statement';
 import { journalTotals } from '#shared/invoices/journal-totals';
 import type { LedgerEntry } from '#shared/invoices/ledger-entry';
 import { owedByAge } from '#shared/invoices/owed-by-age';
-import type { Journal, Statement } from '#shared/invoices/payment-schema';
+import type { Journal, OwedInCurrency, Statement } from '#shared/invoices/payment-schema';
 import { sumMinor } from '#shared/money/sum-minor';
 import type { InvoiceRow } from './invoice-model';
 import { todayIn, type InvoiceParts } from './invoice-parts';
@@ -24,6 +25,7 @@ function ofInvoice(row: InvoiceRow, names: Named): LedgerEntry {
   return {
     ...{ id: row.id, day: row.issuedOn ?? '', kind: row.kind, number: row.number ?? '' },
     ...{ clientId: row.clientId, clientName: names.get(row.clientId) ?? '' },
+    ...{ note: '', currency: row.currency },
     net_minor: sign * row.netMinor,
     tax_minor: sign * row.taxMinor,
     rounding_minor: sign * row.roundingMinor,
@@ -39,14 +41,15 @@ function kindOf({ deed, refundsPaymentId }: PaymentRow): LedgerEntry['kind'] {
 
 const ofPayment = (row: PaymentRow, names: Named): LedgerEntry => ({
   ...{ id: row.id, day: row.receivedOn, kind: kindOf(row), number: row.reference },
-  ...{ clientId: row.clientId, clientName: names.get(row.clientId) ?? '' },
+  ...{ clientId: row.clientId, clientName: names.get(row.clientId) ?? '', note: '', currency: row.currency },
   ...noTax,
   amount_minor: -row.amountMinor,
 });
 
-const ofWriteOff = (row: WriteOffRow, invoice: InvoiceRow | undefined, names: Named): LedgerEntry => ({
-  ...{ id: row.id, day: row.writtenOn, kind: 'write-off', number: invoice?.number ?? '' },
-  ...{ clientId: invoice?.clientId ?? '', clientName: names.get(invoice?.clientId ?? '') ?? '' },
+const ofWriteOff = (row: WriteOffRow, invoice: InvoiceRow, names: Named): LedgerEntry => ({
+  ...{ id: row.id, day: row.writtenOn, kind: 'write-off', number: invoice.number ?? '' },
+  ...{ clientId: invoice.clientId, clientName: names.get(invoice.clientId) ?? '' },
+  ...{ note: `${row.reason} (${row.byName})`, currency: invoice.currency },
   ...noTax,
   amount_minor: -row.amountMinor,
 });
@@ -54,48 +57,61 @@ const ofWriteOff = (row: WriteOffRow, invoice: InvoiceRow | undefined, names: Na
 const byDay = (one: LedgerEntry, other: LedgerEntry): number =>
   one.day < other.day || (one.day === other.day && one.id < other.id) ? -1 : 1;
 
-/** What is owed, statements and the journal: read from the rows, in the currency the workshop keeps its books in. */
+/** What a client may read of an entry: not what the workshop noted of it. */
+const toldOf = <T extends LedgerEntry>({ note: _note, currency: _currency, ...told }: T) => told;
+
+const isMoving = ({ opening_minor, lines }: { opening_minor: number; lines: readonly unknown[] }): boolean =>
+  opening_minor !== 0 || lines.length > 0;
+
+/** What is owed, statements and the journal: read from the rows, each currency by itself. */
 export class LedgerService {
   constructor(private readonly parts: InvoiceParts) {}
 
-  async owed(workshopId: string) {
-    const { currency } = await this.parts.workshops.get(workshopId);
+  async owed(workshopId: string): Promise<{ day: string; currencies: OwedInCurrency[] }> {
     const day = await todayIn(this.parts, workshopId);
-    const invoices = (await this.parts.invoices.open(workshopId)).filter((row) => row.currency === currency);
-    const credits = (await this.parts.payments.withCredit(workshopId)).filter((row) => row.currency === currency);
-    const owed = owedByAge(
-      invoices.map((row) => ({
-        clientId: row.clientId,
-        dueOn: row.dueOn ?? row.issuedOn ?? day,
-        open_minor: row.openMinor,
-      })),
-      { today: day, credits: credits.map(({ clientId, creditMinor }) => ({ clientId, credit_minor: creditMinor })) },
-    );
+    const open = (await this.parts.invoices.open(workshopId)).map((row) => ({
+      ...{ clientId: row.clientId, currency: row.currency, open_minor: row.openMinor, credit_minor: 0 },
+      dueOn: row.dueOn ?? row.issuedOn ?? day,
+    }));
+    const credit = (await this.parts.payments.withCredit(workshopId)).map((row) => ({
+      ...{ clientId: row.clientId, currency: row.currency, open_minor: 0, credit_minor: row.creditMinor, dueOn: day },
+    }));
+    const rows = [...open, ...credit];
+    if (rows.length === 0) return { day, currencies: [] };
     const names = await this.names(
       workshopId,
-      owed.map(({ clientId }) => clientId),
+      rows.map(({ clientId }) => clientId),
     );
-    const items = owed.map((one) => ({
-      ...one,
-      byAge_minor: { ...one.byAge_minor },
-      clientName: names.get(one.clientId) ?? '',
-    }));
-    return { day, currency, items, open_minor: sumMinor(owed.map(({ open_minor }) => open_minor)) };
+    const currencies = (await this.apart(workshopId, rows)).map(({ currency, rows: own }) => {
+      const items = owedByAge(own, { today: day, credits: own }).map((one) => ({
+        ...{ ...one, byAge_minor: { ...one.byAge_minor } },
+        clientName: names.get(one.clientId) ?? '',
+      }));
+      return { currency, items, open_minor: sumMinor(items.map(({ open_minor }) => open_minor)) };
+    });
+    return { day, currencies };
   }
 
   async statement(workshopId: string, clientId: string, days: Days): Promise<Statement> {
     const client = await this.parts.jobs.client(workshopId, clientId);
-    const { currency, entries } = await this.entries(workshopId, { from: beginning, to: days.to });
-    const { opening_minor, lines, closing_minor } = clientStatement(
-      entries.filter((entry) => entry.clientId === clientId),
-      days,
-    );
-    return { currency, clientName: client.name, ...days, opening_minor, lines: [...lines], closing_minor };
+    const entries = await this.entries(workshopId, { from: beginning, to: days.to });
+    const own = entries.filter((entry) => entry.clientId === clientId);
+    const accounts = (await this.apart(workshopId, own)).map(({ currency, rows }) => {
+      const { opening_minor, lines, closing_minor } = clientStatement(rows, days);
+      return { currency, opening_minor, lines: lines.map(toldOf), closing_minor };
+    });
+    const moving = accounts.filter(isMoving);
+    return { clientName: client.name, ...days, currencies: moving.length > 0 ? moving : accounts.slice(0, 1) };
   }
 
   async journal(workshopId: string, days: Days): Promise<Journal> {
-    const { currency, entries } = await this.entries(workshopId, days);
-    return { currency, ...days, entries, totals: journalTotals(entries) };
+    const entries = await this.entries(workshopId, days);
+    const currencies = (await this.apart(workshopId, entries)).map(({ currency, rows }) => ({
+      currency,
+      entries: rows.map(({ currency: _currency, ...entry }) => entry),
+      totals: journalTotals(rows),
+    }));
+    return { ...days, currencies };
   }
 
   /** What clients are called, each asked for once. */
@@ -105,30 +121,31 @@ export class LedgerService {
     return names;
   }
 
-  private async entries(workshopId: string, days: Days): Promise<{ currency: string; entries: LedgerEntry[] }> {
+  private async apart<T extends { readonly currency: string }>(workshopId: string, rows: readonly T[]) {
     const { currency } = await this.parts.workshops.get(workshopId);
-    const isOurs = (row: { currency: string }) => row.currency === currency;
-    const invoices = (await this.parts.invoices.issuedBetween(workshopId, days)).filter(isOurs);
-    const payments = (await this.parts.payments.receivedBetween(workshopId, days)).filter(isOurs);
+    return byCurrency(rows, currency);
+  }
+
+  private async entries(workshopId: string, days: Days): Promise<LedgerEntry[]> {
+    const invoices = await this.parts.invoices.issuedBetween(workshopId, days);
+    const payments = await this.parts.payments.receivedBetween(workshopId, days);
     const writeOffs = await this.parts.payments.writtenOffBetween(workshopId, days);
-    const given = new Map(
-      (
-        await this.parts.invoices.named(
-          workshopId,
-          writeOffs.map(({ invoiceId }) => invoiceId),
-        )
-      ).map((row) => [row.id, row]),
+    const given = await this.parts.invoices.named(
+      workshopId,
+      writeOffs.map(({ invoiceId }) => invoiceId),
     );
     const names = await this.names(
       workshopId,
-      [...invoices, ...payments, ...given.values()].map(({ clientId }) => clientId),
+      [...invoices, ...payments, ...given].map(({ clientId }) => clientId),
     );
-    const ofOurs = writeOffs.filter(({ invoiceId }) => given.get(invoiceId)?.currency === currency);
-    const entries = [
+    const writtenOff = writeOffs.flatMap((row) =>
+      given.filter(({ id }) => id === row.invoiceId).map((invoice) => ofWriteOff(row, invoice, names)),
+    );
+    const moved = [
       ...invoices.map((row) => ofInvoice(row, names)),
       ...payments.map((row) => ofPayment(row, names)),
-      ...ofOurs.map((row) => ofWriteOff(row, given.get(row.invoiceId), names)),
+      ...writtenOff,
     ];
-    return { currency, entries: entries.sort(byDay) };
+    return moved.sort(byDay);
   }
 }

@@ -18,7 +18,7 @@ export class StatementLetters {
     const client = await this.parts.jobs.client(workshopId, clientId);
     const { name, email } = client;
     if (email === '') throw new Rejection('conflict', 'reminder-no-address', { values: { name } });
-    const { closing_minor, currency } = await this.parts.ledger.statement(workshopId, clientId, days);
+    const { currencies } = await this.parts.ledger.statement(workshopId, clientId, days);
     const paper = await this.parts.statements.statement(workshopId, clientId, days);
     const file = await this.parts.files.save(workshopId, paper);
     const today = await todayIn(this.parts, workshopId);
@@ -27,7 +27,7 @@ export class StatementLetters {
       client,
       values: ({ money, day }) => ({
         ...{ note, link: this.parts.clientEntrance, day: day(days.to < today ? days.to : today) },
-        open: money(closing_minor, currency),
+        open: currencies.map(({ closing_minor, currency }) => money(closing_minor, currency)).join(' + '),
       }),
       enclosures: [{ fileId: file.id }],
     });

@@ -39,7 +39,8 @@ export const sampleInvoice = (more: Partial<Invoice> = {}): Invoice => ({
     ],
     ...{ deliveredOn: null, period: null, dueOn: null, terms: '', roundsToCash: false, note: '' },
   },
-  ...{ claim: null, rounding_minor: 0, findings: [], sha256: 'ab'.repeat(32), papers: ['invoice.pdf', 'invoice.xml'] },
+  ...{ claim: null, rounding_minor: 0, findings: [], writeOffs: [] },
+  ...{ sha256: 'ab'.repeat(32), papers: ['invoice.pdf', 'invoice.xml'] },
   totals: {
     ...{ lineNets_minor: [160_00, 40_00], lineSum_minor: 200_00, allowances_minor: 0, charges_minor: 0 },
     categories: [{ tax, net_minor: 200_00, tax_minor: 46_00 }],

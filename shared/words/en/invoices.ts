@@ -149,6 +149,7 @@ export const invoices = {
   'exemption-e': 'Exempt from VAT.',
   'paper-statement': 'Statement',
   'paper-statement-title': 'Statement for {client}, {from} to {to}',
+  'paper-statement-in': 'In {currency}',
   'paper-statement-opening': 'Owed before {day}',
   'paper-statement-closing': 'Owed on {day}',
   'paper-statement-column-day': 'Day',
@@ -164,6 +165,7 @@ export const invoices = {
 
   // Journal
   'journal-sheet': 'Journal',
+  'journal-sheet-in': 'Journal {currency}',
   'journal-title': 'Journal, {from} to {to}',
   'journal-note': 'In {currency}. Credit notes, payments and write-offs stand below nothing.',
   'journal-totals': 'Totals',
@@ -171,6 +173,8 @@ export const invoices = {
   'journal-head-kind': 'Kind',
   'journal-head-number': 'Number',
   'journal-head-client': 'Client',
+  'journal-head-note': 'Note',
+  'journal-head-currency': 'Currency',
   'journal-head-net': 'Net',
   'journal-head-tax': 'Tax',
   'journal-head-rounding': 'Rounding',

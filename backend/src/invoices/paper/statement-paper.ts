@@ -6,6 +6,7 @@ import {
   letterheadBlock,
   paperWords,
   printableLogo,
+  sectionBlocks,
   tableBlock,
   textBlock,
   textStyles,
@@ -51,9 +52,14 @@ const balanceRow = (text: string, amount: string, above: TableRow['above']): Tab
   above,
 });
 
-function rows({ statement }: StatementOnPaper, words: PaperWords): TableRow[] {
+type Account = Statement['currencies'][number];
+
+function rows(
+  { from, to }: Statement,
+  { opening_minor, closing_minor, lines }: Account,
+  words: PaperWords,
+): TableRow[] {
   const { say, money, day } = words;
-  const { opening_minor, closing_minor, from, to, lines } = statement;
   return [
     balanceRow(say('paper-statement-opening', { day: day(from) }), money(opening_minor), 'hair'),
     ...lines.map((line): TableRow => ({
@@ -67,6 +73,17 @@ function rows({ statement }: StatementOnPaper, words: PaperWords): TableRow[] {
     })),
     balanceRow(say('paper-statement-closing', { day: day(to) }), money(closing_minor), 'gold'),
   ];
+}
+
+/** A table for each currency, named where there are several. */
+function accountBlocks(pdf: Pdf, { statement, workshop }: StatementOnPaper): Block[] {
+  const isSingle = statement.currencies.length === 1;
+  return statement.currencies.flatMap((account) => {
+    const words = paperWords({ ...workshop, currency: account.currency });
+    const table = tableBlock(pdf, columns(words), rows(statement, account, words));
+    if (isSingle) return [table];
+    return sectionBlocks(pdf, words.say('paper-statement-in', { currency: account.currency }), [table]);
+  });
 }
 
 function blocks(pdf: Pdf, paper: StatementOnPaper, words: PaperWords): Block[] {
@@ -83,7 +100,7 @@ function blocks(pdf: Pdf, paper: StatementOnPaper, words: PaperWords): Block[] {
       words.say('paper-statement-title', { client: clientName, from: words.day(from), to: words.day(to) }),
       { style: textStyles.title, tag: 'H1' },
     ),
-    tableBlock(pdf, columns(words), rows(paper, words)),
+    ...accountBlocks(pdf, paper),
   ];
 }
 

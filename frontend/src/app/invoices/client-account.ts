@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, resource } from '@angular/core';
 import { RouterLink } from '@angular/router';
+import { byCurrency } from '#shared/invoices/by-currency';
 import type { Client } from '#shared/jobs/client-schema';
 import { sumMinor } from '#shared/money/sum-minor';
 import { Formats } from '../core/formats/formats';
@@ -33,9 +34,11 @@ import { StandingMark } from './standing-mark';
           }
         </ul>
         @if (open.length > 1) {
-          <p class="sum">
-            <span i18n>Owed together</span> <span>{{ owed() }}</span>
-          </p>
+          @for (sum of owed(); track sum) {
+            <p class="sum">
+              <span i18n>Owed together</span> <span>{{ sum }}</span>
+            </p>
+          }
         }
       }
     }
@@ -75,6 +78,8 @@ export class ClientAccount {
   });
   protected readonly invoices = computed(() => (this.reading.hasValue() ? this.reading.value() : undefined));
   protected readonly owed = computed(() =>
-    this.formats.money(sumMinor((this.invoices() ?? []).map(({ open_minor }) => open_minor))),
+    byCurrency(this.invoices() ?? [], this.formats.currency()).map(({ currency, rows }) =>
+      this.formats.moneyIn(currency, sumMinor(rows.map(({ open_minor }) => open_minor))),
+    ),
   );
 }

@@ -63,7 +63,12 @@ export class PaymentSharing {
     params: () => this.payment().clientId,
     loader: ({ params, abortSignal }) => openInvoicesOf(this.calls, params, abortSignal),
   });
-  protected readonly invoices = computed(() => (this.reading.hasValue() ? this.reading.value() : []));
+  /** Money of one currency pays what is owed in it. */
+  protected readonly invoices = computed(() =>
+    (this.reading.hasValue() ? this.reading.value() : []).filter(
+      ({ currency }) => currency === this.payment().currency,
+    ),
+  );
   protected readonly nothing = computed(() => this.reading.hasValue() && this.invoices().length === 0);
   protected readonly form = schemaForm(shareEntrySchema, { invoiceId: '', amount_minor: null });
 

@@ -3,8 +3,8 @@ import { StatementPage } from './statement-page';
 
 const clientId = invoiceId(90);
 const statement = {
-  ...{ currency: 'EUR', clientName: 'Ashgrove House', from: '2026-01-01', to: '2026-12-31' },
-  ...{ opening_minor: 100_00, lines: [], closing_minor: 100_00 },
+  ...{ clientName: 'Ashgrove House', from: '2026-01-01', to: '2026-12-31' },
+  currencies: [{ currency: 'EUR', opening_minor: 100_00, lines: [], closing_minor: 100_00 }],
 };
 const address = `/api/clients/${clientId}`;
 

@@ -3,23 +3,22 @@ import { MatButton } from '@angular/material/button';
 import { Router, RouterLink } from '@angular/router';
 import { readStatementPaper } from '#shared/invoices/owed-endpoints';
 import { addressOf } from '../core/api/address-of';
-import { Formats } from '../core/formats/formats';
 import { PageTitle } from '../core/routing/page-title';
 import { Session } from '../core/session/session';
 import { EmptyState } from '../ui/page/empty-state';
 import { PageHeader } from '../ui/page/page-header';
 import { Skeleton } from '../ui/page/skeleton';
 import { InvoiceCalls, type Period } from './invoice-calls';
-import { ledgerEntryNames } from './invoice-names';
 import { NotedLetterForm } from './noted-letter-form';
 import { PeriodField } from './period-field';
 import { yearOf } from './month-of';
+import { StatementAccount } from './statement-account';
 import { workshopToday } from './workshop-today';
 
 /** The account of one client: what was owed before, every movement with what was owed after it, and the same as a paper. */
 @Component({
   selector: 'app-statement-page',
-  imports: [EmptyState, MatButton, NotedLetterForm, PageHeader, PeriodField, RouterLink, Skeleton],
+  imports: [EmptyState, MatButton, NotedLetterForm, PageHeader, PeriodField, RouterLink, Skeleton, StatementAccount],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './statement-page.html',
   styleUrl: './statement-page.scss',
@@ -29,14 +28,12 @@ export class StatementPage {
   private readonly router = inject(Router);
   private readonly session = inject(Session);
   private readonly title = inject(PageTitle, { optional: true });
-  protected readonly formats = inject(Formats);
 
   readonly clientId = input.required<string>();
   readonly from = input<string>();
   readonly to = input<string>();
 
   protected readonly today = workshopToday();
-  protected readonly entryNames = ledgerEntryNames;
   /** The year so far: what came before it stands in the first line. */
   protected readonly period = computed<Period>(
     () => ({ from: this.from() ?? yearOf(this.today()).from, to: this.to() ?? yearOf(this.today()).to }),

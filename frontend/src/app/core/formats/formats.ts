@@ -74,9 +74,15 @@ export class Formats {
 
   /** Money without its sign, for a column whose heading has it. */
   amount(amount_minor: MinorUnits): string {
-    const digits = { minimumFractionDigits: this.currencyDigits(), maximumFractionDigits: this.currencyDigits() };
+    return this.amountIn(this.currency(), amount_minor);
+  }
+
+  /** The same of another currency, in its own minor units. */
+  amountIn(currency: string, amount_minor: MinorUnits): string {
+    const count = currencyDigits(currency);
+    const digits = { minimumFractionDigits: count, maximumFractionDigits: count };
     const format = new Intl.NumberFormat(this.locale(), { numberingSystem: 'latn', ...digits });
-    return format.format(textOf(amount_minor, this.currencyDigits()) as unknown as number);
+    return format.format(textOf(amount_minor, count) as unknown as number);
   }
 
   /** A plain number with at most and at least so many decimals, grouped as the locale has it. */
