@@ -1,10 +1,11 @@
 import { ribbonForSpecs, ribbonLot, ribbonTask } from './ribbon-for-specs';
 import type { DrawnPart } from './ribbon-layout';
+import type { RibbonLot } from './ribbon-lot';
 import { RibbonLines } from './ribbon-lines';
 
 const scale = { first_minutes: 0, last_minutes: 20_000, hour_px: 60 };
 const everything: DrawnPart = { left: 0, right: 1e6, top: 0, bottom: 1e6 };
-const layoutOf = (lots: Parameters<typeof ribbonLayout>[0], part = everything, hour_px = 60) =>
+const layoutOf = (lots: readonly RibbonLot[], part = everything, hour_px = 60) =>
   new RibbonLines().in(lots, { scale: { ...scale, hour_px }, part, row_px: 68 });
 
 describe('The layout of the ribbon', () => {

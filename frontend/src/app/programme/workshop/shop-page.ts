@@ -1,9 +1,11 @@
 import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import type { DayHours } from '#shared/programme/shop-calendar';
+import type { CardSide } from '#shared/rate-cards/merged-values';
 import type { ShopContent } from '#shared/programme/shop-schema';
 import { holdWhileDirty } from '../../core/forms/hold-while-dirty';
 import { Notices } from '../../core/problems/notices';
+import { TwoSides } from '../../jobs';
 import { Entry } from '../../ui/field/entry';
 import { Field } from '../../ui/field/field';
 import { FormComplaint } from '../../ui/field/form-complaint';
@@ -34,6 +36,7 @@ import { WeekEntry } from './week-entry';
     ShopPeople,
     ShopPlaces,
     Skeleton,
+    TwoSides,
     WeekEntry,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -59,8 +62,16 @@ export class ShopPage {
   }
 
   protected async keep(): Promise<void> {
-    if (await this.store.keep()) this.notices.say($localize`Kept. Programmes are planned with it from now on.`);
-    else if (this.store.general().length === 0)
+    this.tell(await this.store.keep());
+  }
+
+  protected async settle(side: CardSide): Promise<void> {
+    this.tell(await this.store.settle(side));
+  }
+
+  private tell(isKept: boolean): void {
+    if (isKept) this.notices.say($localize`Kept. Programmes are planned with it from now on.`);
+    else if (this.store.general().length === 0 && !this.store.differences())
       this.notices.complain($localize`Not kept: something is missing or wrong, see the entries marked.`);
   }
 }
