@@ -48,6 +48,22 @@ describe('DocumentForm', () => {
     expect(form.value('shape.sides_mm')).toEqual([60.325, 38.1]);
   });
 
+  it('asks for each empty entry that was left, one after the other, those that came later too', () => {
+    open();
+    form.reset({ name: '', shape: { kind: 'circle', diameter_mm: null }, typed: {} });
+    form.control('name').markAsTouched();
+    expect([form.message('name'), form.message('shape.diameter_mm')]).toEqual(['Please fill this in.', '']);
+    form.control('shape.diameter_mm').markAsTouched();
+    expect(form.message('shape.diameter_mm')).toBe('Please fill this in.');
+    form.reset({ name: '', shape: { kind: 'plank', sides_mm: [] }, typed: {} });
+    form.control('name').markAsTouched();
+    form.insert('shape.sides_mm', 0, 25);
+    form.control('shape.sides_mm.0').markAsPristine();
+    form.control('shape.sides_mm.0').setValue(null);
+    form.control('shape.sides_mm.0').markAsTouched();
+    expect(form.message('shape.sides_mm.0')).toBe('Please fill this in.');
+  });
+
   it('lets lists grow, shrink and change their order, texts going along', () => {
     open();
     form.insert('shape.sides_mm', 2, 25);

@@ -1,7 +1,7 @@
 import { DestroyRef, type Signal, computed, inject, signal } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import type { FormControl } from '@angular/forms';
-import { type AbstractControl, FormArray, FormGroup, ValueChangeEvent, TouchedChangeEvent } from '@angular/forms';
+import { type AbstractControl, FormArray, FormGroup, ValueChangeEvent } from '@angular/forms';
 import { Subject, filter, switchMap } from 'rxjs';
 import type * as z from 'zod';
 import { complaintsOf, readBy } from '#shared/problems/complaints-of';
@@ -9,6 +9,7 @@ import { Formats } from '../formats/formats';
 import { Words } from '../formats/words';
 import { documentControls, enteredDocument, type TypedTexts } from './document-controls';
 import type { Writing } from './typed-measure';
+import { visitsOf } from './visits-of';
 
 /** One sentence about one entry; the path has its parts joined by dots. */
 interface Remark {
@@ -46,12 +47,13 @@ export class DocumentForm<S extends z.ZodType> {
   readonly edited = this.changes.asObservable();
 
   constructor(private readonly schema: S) {
-    const events = this.roots.pipe(
+    const life = inject(DestroyRef);
+    const changes = this.roots.pipe(
       switchMap((root) => root.events),
-      takeUntilDestroyed(inject(DestroyRef)),
+      filter((event) => event instanceof ValueChangeEvent),
     );
-    events.pipe(filter((event) => event instanceof ValueChangeEvent)).subscribe(() => this.follow());
-    events.pipe(filter((event) => event instanceof TouchedChangeEvent)).subscribe(() => this.turn());
+    changes.pipe(takeUntilDestroyed(life)).subscribe(() => this.follow());
+    this.roots.pipe(switchMap(visitsOf), takeUntilDestroyed(life)).subscribe(() => this.turn());
   }
 
   /** Begins again with another document, or with the same one as somebody else made it; `typed` in it holds the texts of its lengths. */

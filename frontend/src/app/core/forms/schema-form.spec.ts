@@ -55,6 +55,16 @@ describe('SchemaForm', () => {
     expect(form.message('address.city')).toBe('');
   });
 
+  it('says what is wrong with each entry that was left, one after the other', () => {
+    const form = make();
+    form.group.controls.name.markAsTouched();
+    form.group.controls.discount.setValue(120);
+    form.group.controls.discount.markAsTouched();
+    form.group.controls.address.controls.city.markAsTouched();
+    expect(form.message('discount')).toBe('Must be at most 100.');
+    expect(form.message('address.city')).toBe('At least 2 characters, please.');
+  });
+
   it('gives its complaints to the controls too, so that Angular knows the form is not valid', () => {
     const { group } = make();
     expect(group.controls.address.controls.city.errors).toEqual({ complaint: 'At least 2 characters, please.' });

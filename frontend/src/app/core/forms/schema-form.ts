@@ -1,12 +1,13 @@
 import { DestroyRef, Injector, type Signal, afterNextRender, inject, signal, DOCUMENT } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
-import { type AbstractControl, type FormGroup, TouchedChangeEvent, ValueChangeEvent } from '@angular/forms';
+import { type AbstractControl, type FormGroup, ValueChangeEvent } from '@angular/forms';
 import { filter } from 'rxjs';
 import type * as z from 'zod';
 import { complaintsOf, readBy } from '#shared/problems/complaints-of';
 import { Words } from '../formats/words';
 import { ProblemError } from '../problems/problem-error';
 import { entered, schemaControls, type Entries, type SchemaControls } from './schema-controls';
+import { visitsOf } from './visits-of';
 
 /** One sentence about one entry; the path has its parts joined by dots. */
 interface Remark {
@@ -51,9 +52,12 @@ export class SchemaForm<S extends z.ZodObject> {
     entries: Entries<S>,
   ) {
     this.group = schemaControls(schema, entries);
-    const events = this.group.events.pipe(takeUntilDestroyed(inject(DestroyRef)));
-    events.pipe(filter((event) => event instanceof ValueChangeEvent)).subscribe(() => this.parse());
-    events.pipe(filter((event) => event instanceof TouchedChangeEvent)).subscribe(() => this.show());
+    const life = inject(DestroyRef);
+    const changes = this.group.events.pipe(filter((event) => event instanceof ValueChangeEvent));
+    changes.pipe(takeUntilDestroyed(life)).subscribe(() => this.parse());
+    visitsOf(this.group)
+      .pipe(takeUntilDestroyed(life))
+      .subscribe(() => this.show());
     this.parse();
   }
 
