@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { exemptionCodes } from '#shared/invoices/exemption-codes';
 import { invoiceKinds, type InvoiceContent } from '#shared/invoices/invoice';
 import { vatId } from '#shared/invoices/invoice-settings-schema';
 import { unitCodes } from '#shared/invoices/unit-code';
@@ -68,7 +69,7 @@ const exemptionSchema = z.strictObject({
   reasonCode: z
     .string()
     .max(30)
-    .regex(/^(VATEX-[A-Z0-9-]+)?$/),
+    .refine((code) => code === '' || exemptionCodes.includes(code), complain('invoice-exemption-code')),
   reason: optionalLine(300),
 });
 

@@ -183,6 +183,20 @@ describe('the text', () => {
     expect(ublFaults(outside)).toEqual([]);
   });
 
+  it('gives an exemption its code and its words, and a price its base quantity (BT-121, BT-120, BT-149)', () => {
+    const exemptions = [{ code: 'E', reasonCode: 'VATEX-EU-132-1N', reason: 'Services to a museum' }] as const;
+    const priced = line('E', '0', { quantity: '10', price: '410.00', baseQuantity: '2', unit: 'H87' });
+    const xml = ublInvoice(ofLines([priced], { exemptions }));
+    const category = 'TaxTotal/TaxSubtotal/TaxCategory';
+    const root = ublRoot(xml);
+    expect(textAt(root, `${category}/TaxExemptionReasonCode`)).toBe('VATEX-EU-132-1N');
+    expect(textAt(root, `${category}/TaxExemptionReason`)).toBe('Services to a museum');
+    expect(textAt(root, 'InvoiceLine/LineExtensionAmount')).toBe('2050.00');
+    const [base] = root.getElementsByTagName('cbc:BaseQuantity');
+    expect([base.textContent, base.getAttribute('unitCode')]).toEqual(['2', 'H87']);
+    expect(ublFaults(xml)).toEqual([]);
+  });
+
   it('writes what a person typed as text, whatever it is, and no character XML has none for', () => {
     const name = 'A & B <script> ]]> "q" \u0001\u000b é\u{1F600}';
     const root = ublRoot(ublInvoice(ofLines([line('S', '20', { name })])));

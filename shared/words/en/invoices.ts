@@ -13,6 +13,7 @@ export const invoices = {
   'invoice-buyer-number': 'Under reverse charge the client’s VAT number or company number is needed.',
   'invoice-buyer-vat-number': 'A supply within the Union needs the client’s VAT number.',
   'invoice-exemption-missing': 'Lines of category {code} charge no tax. Please say why.',
+  'invoice-exemption-code': 'No such code is in the list. Choose one from it, or leave it empty.',
   'invoice-standard-rate': 'Category S needs a rate above 0. For a rate of nothing choose zero rated or exempt.',
   'invoice-outside-scope-alone':
     'What is outside the scope of VAT needs an invoice of its own, with no other category on it.',
@@ -132,6 +133,7 @@ export const invoices = {
   'paper-invoice-tax-sum': 'Tax {code}, {rate_percent} of {net_minor}',
   'paper-invoice-untaxed': 'Tax {code}, nothing on {net_minor}',
   'paper-invoice-gross': 'Total with tax',
+  'paper-invoice-exempt': '{reason} ({code})',
   'paper-invoice-prepaid': 'Paid before',
   'paper-invoice-rounding': 'Rounding',
   'paper-invoice-due-sum': '{kind, select, invoice {To be paid} other {Given back}}',

@@ -87,11 +87,14 @@ const exemptionWords = {
   O: 'exemption-o',
 } as const;
 
-/** Why a category charges nothing, in the words entered or in ours. */
+/** Why a category charges nothing, in the words entered or in ours, with the code other programs read. */
 function exemptionText({ invoice, words }: InvoiceOnPaper, code: TaxCode): string {
   const exemption = exemptionOf(code, invoice.exemptions);
   if (!exemption) return '';
-  return exemption.reason || words.say(exemptionWords[code as keyof typeof exemptionWords]);
+  const reason = exemption.reason || words.say(exemptionWords[code as keyof typeof exemptionWords]);
+  return exemption.reasonCode === ''
+    ? reason
+    : words.say('paper-invoice-exempt', { reason, code: exemption.reasonCode });
 }
 
 const taxSums = (paper: InvoiceOnPaper): Sum[] =>

@@ -6,8 +6,13 @@ import { draftAmounts } from './draft-amounts';
 
 type Line = InvoiceContent['lines'][number];
 
-const lineText = ({ name, quantity, price }: Line, formats: Formats): string =>
-  `${name}: ${formats.number(Number(quantity), 6)} × ${formats.number(Number(price), 6)}`;
+function lineText({ name, quantity, price, baseQuantity }: Line, formats: Formats): string {
+  const [count, amount, base] = [quantity, price, baseQuantity].map((text) => formats.number(Number(text), 6));
+  return `${name}: ${count} × ${amount}${baseQuantity === '1' ? '' : ` / ${base}`}`;
+}
+
+const exemptionText = ({ reason, reasonCode }: InvoiceContent['exemptions'][number]): string =>
+  [reason, reasonCode].filter(Boolean).join(' ');
 
 /** What was entered of a draft and differs from what somebody else kept; nothing when nobody did. */
 export function draftDifferences(
@@ -23,6 +28,7 @@ export function draftDifferences(
     [$localize`To be paid`, formats.moneyIn(theirs.currency, draftAmounts(content, theirs)?.totals.due_minor ?? 0)],
     [$localize`Delivered`, day(content.deliveredOn)],
     [$localize`Due`, day(content.dueOn)],
+    [$localize`Why no tax is charged`, content.exemptions.map(exemptionText).filter(Boolean).join('\n')],
     [$localize`Terms`, content.terms],
     [$localize`Note`, content.note],
   ];

@@ -38,6 +38,7 @@ export class DraftLine {
   protected readonly taxNames = taxCodeNames;
   private readonly wantsWords = signal(false);
   private readonly wantsAllowance = signal(false);
+  private readonly wantsBase = signal(false);
   protected readonly path = computed(() => `lines.${this.place()}`);
   private readonly line = computed(() => this.form().value<InvoiceContent['lines'][number]>(this.path()));
   protected readonly name = computed(() => this.line()?.name || $localize`Line ${this.place() + 1}:place:`);
@@ -50,6 +51,9 @@ export class DraftLine {
   protected readonly showsAllowances = computed(
     () => this.wantsAllowance() || (this.line()?.allowancesCharges.length ?? 0) > 0,
   );
+  /** A price may be for more than one of what is counted (BT-149): 410.00 for 2. */
+  protected readonly showsBase = computed(() => this.wantsBase() || (this.line()?.baseQuantity ?? '1') !== '1');
+  protected readonly priceLabel = computed(() => (this.showsBase() ? $localize`Price` : $localize`Price of one`));
   protected readonly isRated = computed(() => isRated(this.line()?.tax.code ?? 'S'));
   /** What stays as the contract has it, in a line of words. */
   protected readonly fixed = computed(() => {
@@ -65,6 +69,10 @@ export class DraftLine {
 
   protected openWords(): void {
     this.wantsWords.set(true);
+  }
+
+  protected openBase(): void {
+    this.wantsBase.set(true);
   }
 
   protected openAllowances(): void {

@@ -24,18 +24,33 @@ import { DeedKey } from './deed-key';
 import { draftAmounts } from './draft-amounts';
 import { draftDifferences } from './draft-differences';
 import { DraftLine } from './draft-line';
+import { ExemptionEntry } from './exemption-entry';
 import { isStopping, placeOf, type FindingPlace } from './finding-places';
 import { InvoiceCalls } from './invoice-calls';
 import { InvoiceStore } from './invoice-store';
 import { InvoiceSums } from './invoice-sums';
 import { issueQuestion } from './issue-question';
-import { taxCodeNames } from './tax-code-names';
+
+/** The tax categories anything on it stands under. */
+const usedCodes = ({ lines, allowancesCharges }: Pick<InvoiceContent, 'lines' | 'allowancesCharges'>) =>
+  new Set([...lines, ...allowancesCharges].map(({ tax }) => tax.code));
 
 /** A draft as it is written: buyer, lines, days and terms, with what it comes to and what still stops it beside each. */
 @Component({
   selector: 'app-invoice-draft',
   imports: [
-    ...[AllowanceRows, DraftLine, Entry, EntryAt, Field, FindingList, FormComplaint, InvoiceSums, MatButton],
+    ...[
+      AllowanceRows,
+      DraftLine,
+      Entry,
+      EntryAt,
+      ExemptionEntry,
+      Field,
+      FindingList,
+      FormComplaint,
+      InvoiceSums,
+      MatButton,
+    ],
     ...[ReactiveFormsModule, RouterLink, TwoSides],
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -54,7 +69,6 @@ export class InvoiceDraft {
   readonly invoice = input.required<Invoice>();
 
   protected readonly countries = countryChoices();
-  protected readonly taxNames = taxCodeNames;
   protected readonly form = documentForm(invoiceContentSchema);
   protected readonly isBusy = signal(false);
   protected readonly shownId = signal<string | undefined>(undefined);
@@ -74,7 +88,7 @@ export class InvoiceDraft {
   );
   protected readonly lines = computed(() => this.form.items('lines'));
   protected readonly exemptions = computed(() => {
-    const used = new Set(this.content().lines.map(({ tax }) => tax.code));
+    const used = usedCodes(this.content());
     const entered = this.form.value<InvoiceContent['exemptions']>('exemptions') ?? [];
     return entered.flatMap(({ code }, place) => (used.has(code) ? [{ code, path: `exemptions.${place}` }] : []));
   });
@@ -172,9 +186,9 @@ export class InvoiceDraft {
   private addReasons(): boolean {
     const entered = this.form.value<InvoiceContent['exemptions']>('exemptions') ?? [];
     const lines = this.form.value<InvoiceContent['lines']>('lines') ?? [];
-    const missing = explainedCodes.find(
-      (code) => lines.some(({ tax }) => tax.code === code) && !entered.some((one) => one.code === code),
-    );
+    const allowancesCharges = this.form.value<InvoiceContent['allowancesCharges']>('allowancesCharges') ?? [];
+    const used = usedCodes({ lines, allowancesCharges });
+    const missing = explainedCodes.find((code) => used.has(code) && !entered.some((one) => one.code === code));
     if (!missing) return false;
     this.form.insert('exemptions', entered.length, { code: missing, reasonCode: '', reason: '' });
     return true;

@@ -31,6 +31,43 @@ describe('InvoicePage, a draft', () => {
     expect((request.body as Invoice['content']).lines.map(({ quantity }) => quantity)).toEqual(['3', '1']);
   });
 
+  it('takes a price for several of what is counted, and comes to what that makes', async () => {
+    const visit = await begin(sampleDraft());
+    await visit.press('Price for several');
+    await visit.type('Price', '410.00');
+    await visit.type('for how many', '4');
+    // 2 h at 410.00 for 4 are 205.00, with 40.00 245.00; 23 % of it 56.35.
+    expect(visit.text).toContain('To be paid€301.35');
+    await visit.settle(rested_ms);
+    const { request } = visit.request('PUT', address);
+    const [first] = (request.body as Invoice['content']).lines;
+    expect([first.price, first.baseQuantity]).toEqual(['410', '4']);
+  });
+
+  it('finds the code of an exemption by its name, says what it stands for, and keeps no code that is not in the list', async () => {
+    const draft = sampleDraft();
+    const exempt = { ...draft.content.lines[0], tax: { code: 'E', percent: '0' } } as const;
+    const exemptions = [{ code: 'E', reasonCode: '', reason: 'Museum services' }] as Invoice['content']['exemptions'];
+    const visit = await begin({ ...draft, content: { ...draft.content, lines: [exempt], exemptions } });
+    const choose = async (text: string) => {
+      const entry = visit.entry('Code of the reason');
+      entry.value = text;
+      entry.dispatchEvent(new Event('change'));
+      await visit.settle();
+    };
+    expect(visit.element.querySelectorAll('datalist option')).toHaveLength(83);
+    await choose('cultural services (article 132 1 n)');
+    expect(visit.entry('Code of the reason').value).toBe('VATEX-EU-132-1N');
+    expect(visit.text).toContain('Cultural services (article 132 1 n)');
+    await visit.settle(rested_ms);
+    const { request } = visit.request('PUT', address);
+    expect((request.body as Invoice['content']).exemptions).toMatchObject([{ reasonCode: 'VATEX-EU-132-1N' }]);
+    await choose('culture');
+    expect(visit.text).toContain('No such code is in the list.');
+    await visit.settle(rested_ms);
+    expect(visit.waiting('PUT', address)).toHaveLength(0);
+  });
+
   it('says beside the entries what stops it, and does not issue it before', async () => {
     const findings: Invoice['findings'] = [
       { kind: 'refuse', code: 'invoice-seller-number', values: {} },
@@ -125,6 +162,31 @@ describe('InvoicePage, issued', () => {
     expect(visit.text).not.toContain('C2026-0003');
     const papers = [...visit.element.querySelectorAll('.papers a')].map((one) => one.getAttribute('href'));
     expect(papers).toEqual([`${address}/papers/invoice.pdf`, `${address}/papers/invoice.xml`]);
+  });
+
+  it('says what a price is for, why no tax is charged and by which code, and what was given up by whom', async () => {
+    const issued = sampleInvoice();
+    const line = {
+      ...issued.content.lines[0],
+      quantity: '10',
+      price: '410.00',
+      baseQuantity: '2',
+      unit: 'H87',
+    } as const;
+    const tax = { code: 'AE', percent: '0' } as const;
+    const writeOffs = [
+      { id: invoiceId(50), amount_minor: 5_00, reason: 'Agreed by telephone', writtenOn: '2026-04-01', byName: 'Orla' },
+    ];
+    const visit = await begin({
+      ...issued,
+      content: { ...issued.content, lines: [{ ...line, tax }] },
+      totals: { ...issued.totals, categories: [{ tax, net_minor: 2050_00, tax_minor: 0 }] },
+      writeOffs,
+    });
+    await related(visit);
+    expect(visit.text).toContain('410.00 for 2 pc');
+    expect(visit.text).toContain('Reverse charge VATEX-EU-AE');
+    expect(visit.text).toContain('Agreed by telephone 1 Apr 2026, Orla-€5.00');
   });
 
   it('offers writing off to the owner alone, and a reminder only once it is overdue', async () => {

@@ -1,8 +1,10 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, output, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { Router, RouterLink } from '@angular/router';
+import { exemptionOf } from '#shared/invoices/exemption-of';
 import type { Invoice, InvoicePaper } from '#shared/invoices/invoice-schema';
 import { readInvoicePaper } from '#shared/invoices/invoices-endpoints';
+import { currencyDigits } from '#shared/money/currency-digits';
 import { addressOf } from '../core/api/address-of';
 import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
@@ -10,6 +12,7 @@ import { newId } from '../core/new-id';
 import { Notices } from '../core/problems/notices';
 import { ProblemError } from '../core/problems/problem-error';
 import { Session } from '../core/session/session';
+import { exemptionNames } from './exemption-names';
 import { InvoiceCalls } from './invoice-calls';
 import { InvoiceRelated } from './invoice-related';
 import { InvoiceSums } from './invoice-sums';
@@ -78,11 +81,22 @@ export class InvoiceView {
         quantity: this.formats.number(Number(line.quantity), 6),
         unit: line.unit,
       }),
-      price: this.formats.number(Number(line.price), 6, this.formats.currencyDigits()),
+      price: this.price(line),
       rate: isRated(line.tax.code)
         ? this.formats.figure('percent', Number(line.tax.percent))
         : taxCodeNames[line.tax.code],
     }));
+  });
+
+  /** Why a category charges nothing: the words on its paper, and the code that stands in the data. */
+  protected readonly exemptions = computed(() => {
+    const { totals, content } = this.invoice();
+    return totals.categories.flatMap(({ tax }) => {
+      const exemption = exemptionOf(tax.code, content.exemptions);
+      if (!exemption) return [];
+      const reason = exemption.reason || (exemptionNames[exemption.reasonCode] ?? '');
+      return [{ ...exemption, reason, name: taxCodeNames[tax.code] }];
+    });
   });
 
   protected close(): void {
@@ -92,6 +106,17 @@ export class InvoiceView {
   protected done(): void {
     this.close();
     this.changed.emit();
+  }
+
+  /** A price may be for more than one. */
+  private price({ price, baseQuantity, unit }: Invoice['content']['lines'][number]): string {
+    const text = this.formats.number(Number(price), 6, currencyDigits(this.invoice().currency));
+    if (Number(baseQuantity) === 1) return text;
+    const quantity = this.formats.number(Number(baseQuantity), 6);
+    return this.words.say('paper-invoice-price-for', {
+      price: text,
+      quantity: this.words.say('paper-invoice-quantity', { quantity, unit }),
+    });
   }
 
   protected async credit(): Promise<void> {
