@@ -19,7 +19,7 @@ describe('leafCardSchema', () => {
     ['leaves have no length', { ribbon_mm: 20_000 }, ['ribbon_mm leaf-no-ribbon']],
     ['an alloy has something in it', { alloy: { gold: 0 } }, ['alloy leaf-alloy-empty']],
     ['a leaf costs something', { price: '0.00' }, ['price entry-not-above']],
-    ['a price is a decimal text', { price: '52,00' }, ['price entry-wrong-form']],
+    ['a price is a decimal text', { price: '52,00' }, ['price entry-not-decimal']],
     [
       'a pack is more than a booklet',
       { breaks: [{ booklets: 1, off_percent: '5' }] },

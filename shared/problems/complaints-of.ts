@@ -34,6 +34,12 @@ function tooBig(issue: Extract<Issue, { code: 'too_big' }>) {
 const isEmpty = (issue: Issue): boolean =>
   'input' in issue && (issue.input === undefined || issue.input === null || issue.input === '');
 
+/** A pattern made with `complain` names its code as its message. */
+function formCode({ format, message }: Extract<Issue, { code: 'invalid_format' }>): WordCode {
+  if (message.startsWith('entry-')) return message as WordCode;
+  return format === 'email' ? 'entry-not-email' : 'entry-wrong-form';
+}
+
 function worded(issue: Issue): Pick<Complaint, 'code' | 'values'> {
   if (issue.code.startsWith('invalid_') && isEmpty(issue)) return plain('entry-missing');
   switch (issue.code) {
@@ -48,7 +54,7 @@ function worded(issue: Issue): Pick<Complaint, 'code' | 'values'> {
     case 'invalid_type':
       return plain(issue.expected === 'int' ? 'entry-not-whole' : 'entry-wrong-kind');
     case 'invalid_format':
-      return plain(issue.format === 'email' ? 'entry-not-email' : 'entry-wrong-form');
+      return plain(formCode(issue));
     case 'unrecognized_keys':
       return plain('entry-unknown');
     default:

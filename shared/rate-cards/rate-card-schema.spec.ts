@@ -91,7 +91,7 @@ describe('the schema of a rate card', () => {
       ['money', 'grades', 0, 'costPerHour'],
       'fair',
       'money.grades.0.costPerHour',
-      'entry-wrong-form',
+      'entry-not-decimal',
     ],
     ['an unknown part', ['weather'], {}, 'weather', 'entry-unknown'],
   ] as const)('complains of %s', (_sentence, path, value, at, code) => {

@@ -34,6 +34,7 @@ export const problems = {
   'entry-not-email': 'This does not look like an e-mail address.',
   'entry-not-link': 'Only addresses that begin with http:, https: or mailto: are kept.',
   'entry-wrong-form': 'This is not written in the form expected here.',
+  'entry-not-decimal': 'A plain number of nought or more, please, with six decimals at most.',
   'entry-twice': 'This is in the list already.',
   'entry-not-offered': 'Choose one of the values offered.',
 } as const;

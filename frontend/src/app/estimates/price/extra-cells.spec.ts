@@ -34,7 +34,7 @@ describe('typedCell', () => {
     ['a thousands separator', timber, 'quantity', '1,200', 'number-grouped'],
     ['no number', timber, 'rate', 'much', 'number-unclear'],
     ['an empty quantity', timber, 'quantity', '', 'entry-missing'],
-    ['a negative cost', crate, 'rate', '-1', 'entry-wrong-form'],
+    ['a negative cost', crate, 'rate', '-1', 'entry-not-decimal'],
     ['no name', crate, 'name', '  ', 'entry-missing'],
     ['a rate of insurance over the whole', insurance, 'quantity', '101', 'entry-too-large'],
   ] as const)('refuses %s', (_, line, cell, text, code) => {
