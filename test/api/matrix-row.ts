@@ -17,6 +17,8 @@ export interface MatrixRow {
   readonly status?: number;
   /** The call changes who the caller is, so somebody new makes it. */
   readonly bySomebodyNew?: true;
+  /** What is asked for is the caller’s own, so it is made ready for each of them. */
+  readonly ofTheCaller?: true;
   /** The body names rows of the workshop, so that another workshop's must be refused as not found. Known for what stands in the path. */
   readonly namesRows?: true;
 }

@@ -8,6 +8,7 @@ import { changeEstimate } from '#shared/estimates/estimates-endpoints';
 import { issueEstimate } from '#shared/estimates/issues-endpoints';
 import type { Alternative, ExtraLine } from '#shared/estimates/settings';
 import { sampleEstimate, type SampleEstimate } from './sample-estimate';
+import { onceInWhatStandsStill } from './standing-still';
 import type { Api, TestWorkshop } from './start-api';
 import type { Parts, Visitor } from './visitor';
 
@@ -31,10 +32,12 @@ export interface SampleIssue extends SampleEstimate {
   readonly issueId: string;
 }
 
-export async function sampleIssue(workshop: TestWorkshop, api: Api): Promise<SampleIssue> {
+async function newIssue(workshop: TestWorkshop, api: Api): Promise<SampleIssue> {
   const sample = await sampleEstimate(workshop);
   return { ...sample, issueId: await issueOf(workshop, api, sample.estimateId) };
 }
+
+export const sampleIssue = onceInWhatStandsStill(newIssue);
 
 /** The alternatives of a sample: two ways of gilding of which one may be chosen, and a crate that may be ticked. */
 export interface SampleChoices extends SampleIssue {
@@ -110,9 +113,11 @@ export async function acceptanceOf(visitor: Visitor, issueId: string, choice: re
 }
 
 /** An issue whose client has accepted it on the page. */
-export async function acceptedIssue(workshop: TestWorkshop, api: Api): Promise<SampleIssue & { visitor: Visitor }> {
-  const sample = await sampleIssue(workshop, api);
-  const visitor = await clientOf(workshop, api, sample.issueId);
-  await done(visitor.call(acceptIssue, await acceptanceOf(visitor, sample.issueId)));
-  return { ...sample, visitor };
-}
+export const acceptedIssue = onceInWhatStandsStill(
+  async (workshop, api): Promise<SampleIssue & { visitor: Visitor }> => {
+    const sample = await newIssue(workshop, api);
+    const visitor = await clientOf(workshop, api, sample.issueId);
+    await done(visitor.call(acceptIssue, await acceptanceOf(visitor, sample.issueId)));
+    return { ...sample, visitor };
+  },
+);

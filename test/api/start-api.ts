@@ -15,6 +15,7 @@ import type { Platform } from '../../backend/src/platform/platform';
 import { freshDatabase } from '../database/fresh-database';
 import { canary } from './canary';
 import { faultsOfLog } from './faults-of-log';
+import { ledgerFaults } from './ledger';
 import { MovingClock } from './moving-clock';
 import { addPerson, openWorkshop, type Door, type TestPerson, type TestWorkshop } from './test-workshop';
 import { Visitor } from './visitor';
@@ -42,7 +43,10 @@ export interface Api {
   stranger(headers?: Readonly<Record<string, string>>): Promise<Visitor>;
   /** Does the work behind the scenes and answers the mails, newest first. */
   mails(): Promise<CaughtMail[]>;
-  /** Ends it, and fails where its log holds a secret or an event that is not one line (ASVS 16.2.5, 16.4.1). */
+  /**
+   * Ends it, and fails where the books of a workshop do not agree, or its log holds a secret or an event that is not one line
+   * (ASVS 16.2.5, 16.4.1). Every spec and every journey ends by it.
+   */
   stop(): Promise<void>;
 }
 
@@ -83,10 +87,10 @@ async function openParts(environment: Environment) {
   const stop = async () => {
     await standIn.stop();
     await catcher.stop();
-    await platform.database.close();
+    const books = await ledgerFaults(platform.database).finally(() => platform.database.close());
     await rm(folder, { recursive: true, force: true });
-    const faults = faultsOfLog(logLines);
-    if (faults.length > 0) throw new Error(`The log of this run: ${faults.slice(0, 5).join('; ')}`);
+    const faults = [...books, ...faultsOfLog(logLines)];
+    if (faults.length > 0) throw new Error(`The books or the log of this run: ${faults.slice(0, 5).join('; ')}`);
   };
   return { platform, clock, logLines, catcher, standIn, app, stop };
 }

@@ -22,3 +22,8 @@ export const allRows: MatrixRows = {
 
 /** The rows of what clients may call. */
 export const clientRows: ClientRows = { ...clientPageRows, ...clientInvoicesRows };
+
+/** The half of the endpoints that stand on issues, acceptances and invoices, by their names: they take as long as all others. */
+export const rowsOfTheBooks: ReadonlySet<string> = new Set(
+  [agreementsRows, invoicesRows, visitsRows, clientRows].flatMap((rows) => Object.keys(rows)),
+);

@@ -1,3 +1,4 @@
+import { randomUUID } from 'node:crypto';
 import { askForClientSignIn } from '#shared/client-page/visits-endpoints';
 import type { ClientRow, ClientRows, MatrixRows } from '../matrix-row';
 import { acceptanceOf, clientOf, linkTo, sampleIssue } from '../sample-client-visit';
@@ -21,7 +22,10 @@ export const visitsRows: MatrixRows = {
     },
     history: 'history-access-opened',
   },
-  [askForClientSignIn.name]: { prepare: () => ({ body: { email: 'nobody@elsewhere.example' } }) },
+  [askForClientSignIn.name]: {
+    // Each asks for somebody else: letters to one address are counted.
+    prepare: () => ({ body: { email: `${randomUUID()}@elsewhere.example` } }),
+  },
 };
 
 export const clientPageRows: ClientRows = {

@@ -1,7 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { v7 as newId } from 'uuid';
-import { issueEstimate } from '#shared/estimates/issues-endpoints';
 import type { MatrixRows } from '../matrix-row';
+import { sampleIssue } from '../sample-client-visit';
 import { sampleEstimate, type SampleEstimate } from '../sample-estimate';
 import { sampleJob } from '../sample-job';
 import type { Api, TestWorkshop } from '../start-api';
@@ -20,13 +20,9 @@ async function issuing(workshop: TestWorkshop, api: Api, { estimateId }: SampleE
   return { params: { estimateId }, body: { version, note: workshop.mark, acceptsOldCard: false }, key: randomUUID() };
 }
 
-async function issued(workshop: TestWorkshop, api: Api): Promise<string> {
-  const sample = await sampleEstimate(workshop);
-  const response = await workshop.people.owner.visitor.call(issueEstimate, await issuing(workshop, api, sample));
-  return (response.body as { id: string }).id;
-}
-
-const oneIssue = async (workshop: TestWorkshop, api: Api) => ({ params: { issueId: await issued(workshop, api) } });
+const oneIssue = async (workshop: TestWorkshop, api: Api) => ({
+  params: { issueId: (await sampleIssue(workshop, api)).issueId },
+});
 
 export const estimatesRows: MatrixRows = {
   listEstimates: { prepare: async (workshop) => ({ params: { jobId: (await sampleEstimate(workshop)).jobId } }) },
@@ -72,7 +68,10 @@ export const estimatesRows: MatrixRows = {
     entries: 2,
   },
   readPaper: {
-    prepare: async (workshop, api) => ({ params: { issueId: await issued(workshop, api), paper: 'estimate.pdf' } }),
+    prepare: async (workshop, api) => {
+      const { params } = await oneIssue(workshop, api);
+      return { params: { ...params, paper: 'estimate.pdf' } };
+    },
   },
   readBenchSheet: {
     prepare: async (workshop) => {

@@ -13,16 +13,17 @@ import {
   stageInvoice,
 } from '../sample-invoice';
 import { sampleClient } from '../sample-job';
+import { onceInWhatStandsStill } from '../standing-still';
 import type { Api, TestWorkshop } from '../start-api';
 
 const oneDraft = async (workshop: TestWorkshop) => {
   const { invoiceId } = await sampleDraft(workshop);
   return { params: { invoiceId } };
 };
-const oneInvoice = async (workshop: TestWorkshop) => {
+const oneInvoice = onceInWhatStandsStill(async (workshop) => {
   const { invoiceId } = await sampleInvoice(workshop);
   return { params: { invoiceId } };
-};
+});
 const oneContract = async (workshop: TestWorkshop, api: Api) => {
   await sayWho(workshop);
   const { jobId, issueId } = await acceptedIssue(workshop, api);
@@ -72,7 +73,7 @@ export const invoicesRows: MatrixRows = {
     history: 'history-invoice-removed',
   },
   beginCreditNote: {
-    prepare: async (workshop) => ({ ...(await oneInvoice(workshop)), body: { creditNoteId: newId() } }),
+    prepare: async (workshop, api) => ({ ...(await oneInvoice(workshop, api)), body: { creditNoteId: newId() } }),
     history: 'history-invoice-begun',
   },
   issueInvoice: {
@@ -80,13 +81,17 @@ export const invoicesRows: MatrixRows = {
     history: 'history-invoice-issued',
   },
   readInvoicePaper: {
-    prepare: async (workshop) => {
-      const { params } = await oneInvoice(workshop);
+    prepare: async (workshop, api) => {
+      const { params } = await oneInvoice(workshop, api);
       return { params: { ...params, paper: 'invoice.xml' } };
     },
   },
   sendInvoice: {
-    prepare: async (workshop) => ({ ...(await oneInvoice(workshop)), body: { note: workshop.mark }, ...keyed() }),
+    prepare: async (workshop, api) => ({
+      ...(await oneInvoice(workshop, api)),
+      body: { note: workshop.mark },
+      ...keyed(),
+    }),
     history: 'history-invoice-sent',
   },
   readContractAccount: {
@@ -148,8 +153,8 @@ export const invoicesRows: MatrixRows = {
     history: 'history-refunded',
   },
   writeOff: {
-    prepare: async (workshop) => ({
-      ...(await oneInvoice(workshop)),
+    prepare: async (workshop, api) => ({
+      ...(await oneInvoice(workshop, api)),
       body: { amount_minor: 100, reason: workshop.mark },
       ...keyed(),
     }),
@@ -177,7 +182,11 @@ export const invoicesRows: MatrixRows = {
   readJournalList: { prepare: () => ({ query: thisYear }) },
   readJournalWorkbook: { prepare: () => ({ query: thisYear }) },
   remindOfInvoice: {
-    prepare: async (workshop) => ({ ...(await oneInvoice(workshop)), body: { note: workshop.mark }, ...keyed() }),
+    prepare: async (workshop, api) => ({
+      ...(await oneInvoice(workshop, api)),
+      body: { note: workshop.mark },
+      ...keyed(),
+    }),
     // It is due in a fortnight yet; invoices.spec.ts reminds of one that is overdue.
     status: 409,
   },
@@ -191,11 +200,11 @@ export const invoicesRows: MatrixRows = {
 };
 
 /** A client who looks at an invoice of a deposit of their job. */
-async function clientWithInvoice(workshop: TestWorkshop, api: Api) {
+const clientWithInvoice = onceInWhatStandsStill(async (workshop, api) => {
   const { jobId, issueId, visitor } = await acceptedIssue(workshop, api);
   const invoice = await stageInvoice(workshop, { jobId, issueId }, { of: 'work', from_percent: '0', to_percent: '10' });
   return { visitor, invoiceId: invoice.id };
-}
+});
 
 const onInvoice =
   (more: Record<string, string> = {}): ClientRow['visit'] =>

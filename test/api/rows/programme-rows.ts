@@ -109,6 +109,7 @@ export const programmeRows: MatrixRows = {
       await acceptedSample(workshop, api, ownCaller(workshop, caller));
       return { query: { day: '2030-01-07' } };
     },
+    ofTheCaller: true,
   },
   markTask: {
     prepare: async (workshop, api, caller) => {
