@@ -1,5 +1,6 @@
-/** What failed sign-ins are counted by. */
-export type LoginScope = 'pair' | 'address' | 'account' | 'link';
+/** What is counted: failed sign-ins; and what clients ask for, whose every time counts, by who it is about and by where it comes from. */
+export type LoginScope =
+  'pair' | 'address' | 'account' | 'link' | 'letter' | 'letter-address' | 'question' | 'question-address';
 
 /** Failed sign-ins of one scope, and when the last was. */
 export interface LoginCount {
@@ -8,7 +9,10 @@ export interface LoginCount {
 }
 
 /** How many failures are free, before waits of 1, 2, 4 … seconds begin. */
-const free: Readonly<Record<LoginScope, number>> = { pair: 5, address: 30, account: 60, link: 10 };
+const free: Readonly<Record<LoginScope, number>> = {
+  ...{ pair: 5, address: 30, account: 60, link: 10 },
+  ...{ letter: 5, 'letter-address': 30, question: 12, 'question-address': 60 },
+};
 const longestWait_milliseconds = 15 * 60_000;
 
 /** Failures are remembered for an hour after the last one. */

@@ -1,4 +1,5 @@
 import { createHash } from 'node:crypto';
+import type { ClientActor } from '#shared/actor/client-actor';
 import { Rejection } from '#shared/problems/rejection';
 import type { WordCode } from '#shared/words/word-code';
 import type { Clock } from '../platform/clock/clock';
@@ -30,6 +31,24 @@ export class LoginThrottleService {
   async beginLink(address: string): Promise<void> {
     const scopes = new Map<string, LoginScope>([[markOf('link', address), 'link']]);
     await this.count('visit-too-often', () => Promise.resolve(scopes));
+  }
+
+  /** The same for letters with a link to sign in by, known address or not: nobody is flooded with mail, and none learns who is known. */
+  async beginLetter(email: string, address: string): Promise<void> {
+    const scopes = new Map<string, LoginScope>([
+      [markOf('letter', email.toLowerCase()), 'letter'],
+      [markOf('letter-address', address), 'letter-address'],
+    ]);
+    await this.count('sign-in-letter-too-often', () => Promise.resolve(scopes));
+  }
+
+  /** The same for what a client asks the workshop, each question being a mail to it. */
+  async beginQuestion({ workshopId, clientId }: ClientActor, address: string): Promise<void> {
+    const scopes = new Map<string, LoginScope>([
+      [markOf('question', workshopId, clientId), 'question'],
+      [markOf('question-address', address), 'question-address'],
+    ]);
+    await this.count('question-too-often', () => Promise.resolve(scopes));
   }
 
   /** The link opened something: it is not counted. */

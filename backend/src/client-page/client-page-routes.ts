@@ -9,6 +9,7 @@ import {
   readClientPaper,
   reviewClientChoice,
 } from '#shared/client-page/client-issues-endpoints';
+import type { Accounts } from '../accounts';
 import { presentQuestion, type Agreements } from '../agreements';
 import { mount, type Route } from '../platform/http/mount';
 import { choiceInAddress } from './choice-in-address';
@@ -16,11 +17,11 @@ import { presentClientDecision } from './client-issue-presenter';
 import type { ClientPageService } from './client-page-service';
 import { presentClientPrice } from './client-price-presenter';
 
-type Settled = Pick<Agreements, 'scope' | 'choices' | 'decisions' | 'questions'>;
+type Settled = Pick<Agreements, 'scope' | 'choices' | 'decisions' | 'questions'> & Pick<Accounts, 'throttle'>;
 
 export const clientPageRoutes = (
   pages: ClientPageService,
-  { scope, choices, decisions, questions }: Settled,
+  { scope, choices, decisions, questions, throttle }: Settled,
 ): Route[] => [
   mount(readClientOverview, ({ client }) => pages.overview(client)),
   mount(readClientLogo, ({ client }) => pages.logo(client)),
@@ -37,9 +38,10 @@ export const clientPageRoutes = (
   mount(readClientPaper, ({ client, params, query }) =>
     pages.paper(client, params.issueId, choiceInAddress(query.choice)),
   ),
-  mount(askClientQuestion, async ({ client, params, body }) =>
-    presentQuestion(await questions.ask(client, params.issueId, body.text)),
-  ),
+  mount(askClientQuestion, async ({ client, params, body, from }) => {
+    await throttle.beginQuestion(client, from.address);
+    return presentQuestion(await questions.ask(client, params.issueId, body.text));
+  }),
   mount(acceptIssue, async ({ client, params, body, from }) => {
     const { agrees: _, ...wish } = body;
     const row = await decisions.accept(client, params.issueId, { ...wish, address: from.address });

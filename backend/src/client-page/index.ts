@@ -26,6 +26,7 @@ export interface ClientPageNeeds {
 export function openClientPage(needs: ClientPageNeeds): ClientPage {
   const pages = new ClientPageService(needs);
   const { agreements } = needs;
-  const visits = visitRoutes({ ways: agreements, throttle: needs.accounts.throttle, pages });
-  return { routes: [...visits, ...clientPageRoutes(pages, agreements)] };
+  const { throttle } = needs.accounts;
+  const visits = visitRoutes({ ways: agreements, throttle, pages });
+  return { routes: [...visits, ...clientPageRoutes(pages, { ...agreements, throttle })] };
 }

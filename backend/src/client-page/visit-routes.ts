@@ -24,5 +24,8 @@ export const visitRoutes = ({ ways: { visits, signIns }, throttle, pages }: Part
     await session.beginVisit(visit);
     return { token: session.forgeryToken, papers: await pages.overview(client) };
   }),
-  mount(askForClientSignIn, ({ body }) => signIns.ask(body.email)),
+  mount(askForClientSignIn, async ({ body, from }) => {
+    await throttle.beginLetter(body.email, from.address);
+    await signIns.ask(body.email);
+  }),
 ];

@@ -5,6 +5,10 @@ export const agreements = {
   'access-no-email':
     'No e-mail address is kept for {client}, so nothing can be sent. Copy the link instead, or enter an address.',
   'visit-too-often': 'Too many links were tried from here. Please wait {seconds} seconds and try again.',
+  'sign-in-letter-too-often':
+    'Several letters were asked for already. Please look in your mail, or wait {seconds, plural, one {# second} other {# seconds}} and try again.',
+  'question-too-often':
+    'That was a lot at once. Please wait {seconds, plural, one {# second} other {# seconds}} before the next question.',
   'choice-one-of-group': 'Only one of “{group}” can be chosen.',
   'choice-fixed':
     'This issue was worked by an earlier reckoning, so it can be accepted only as it stands. Ask the workshop for a new issue if you would like an alternative.',
