@@ -9,10 +9,13 @@ const note = (about: string, steps = 'Gesso'): Finding => ({
 });
 
 describe('distinctFindings', () => {
-  it('tells once what is said of several things, leading to none of them', () => {
+  it('tells once what is said of several things, leading to none of them, and knows of which', () => {
     expect(distinctFindings([note('zone-1'), note('zone-2'), note('zone-3', 'Size coat')])).toEqual([
-      { kind: 'note', code: 'caution-glue-heat', values: { steps: 'Gesso' } },
-      note('zone-3', 'Size coat'),
+      {
+        finding: { kind: 'note', code: 'caution-glue-heat', values: { steps: 'Gesso' } },
+        about: ['zone-1', 'zone-2'],
+      },
+      { finding: note('zone-3', 'Size coat'), about: ['zone-3'] },
     ]);
   });
 });

@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, resource, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { Router, RouterLink } from '@angular/router';
 import type { Finding } from '#shared/words/finding';
@@ -10,14 +10,17 @@ import { Field } from '../../ui/field/field';
 import { FormComplaint } from '../../ui/field/form-complaint';
 import { FindingList } from '../../ui/page/finding-list';
 import { EstimateStore } from '../estimate-store';
-import { distinctFindings } from './distinct-findings';
+import { distinctFindings, type ToldFinding } from './distinct-findings';
 import { findingPlace } from './finding-place';
 import { IssueParts } from './issue-parts';
 import { Issuing } from './issuing';
 import { LettersNotPrinted } from './letters-not-printed';
+import { membersSpokenOf } from './members-spoken-of';
 
 const stopping: readonly Finding['kind'][] = ['refuse', 'missing'];
-const told: readonly Finding['kind'][] = ['caution', 'note'];
+
+/** So many members are named beneath a finding; more are counted. */
+const named = 4;
 
 /** What stands in the way of the next issue, a note to it, and the button that makes it. */
 @Component({
@@ -46,12 +49,35 @@ export class IssueBox {
     ...this.letters.findings(),
     ...letterFindings([{ part: 'note', name: '', text: this.note() }]),
   ]);
+  private readonly told = computed(() => distinctFindings(this.findings()));
+  private readonly places = computed(() => new Map(this.told().map((told) => [told.finding, this.membersOf(told)])));
   protected readonly stopping = computed(() => this.findings().filter(({ kind }) => stopping.includes(kind)));
-  protected readonly warnings = computed(() => distinctFindings(this.findings().filter(({ kind }) => kind === 'warn')));
-  protected readonly others = computed(() =>
-    distinctFindings(this.findings().filter(({ kind }) => told.includes(kind))),
+  protected readonly warnings = computed(() => this.toldOf(['warn']));
+  protected readonly others = computed(() => this.toldOf(['caution', 'note']));
+  protected readonly where = (finding: Finding): string =>
+    this.places().get(finding) ?? this.membersOf({ finding, about: finding.about ? [finding.about] : [] });
+  /** What came into force a moment ago is heard of before it is said that nothing stops the issue. */
+  private readonly look = resource({
+    params: () => this.store.head()?.id,
+    loader: () => this.store.lookAgain(),
+  });
+  protected readonly isReady = computed(
+    () => this.look.status() === 'resolved' && this.stopping().length === 0 && !this.issuing.isCardOld(),
   );
   protected readonly gross = computed(() => this.formats.money(this.store.priced()?.price.gross_minor ?? 0));
+
+  private toldOf(kinds: readonly Finding['kind'][]): Finding[] {
+    return this.told()
+      .map(({ finding }) => finding)
+      .filter(({ kind }) => kinds.includes(kind));
+  }
+
+  private membersOf({ about }: ToldFinding): string {
+    const draft = this.store.draft();
+    const names = draft ? membersSpokenOf(draft, about) : [];
+    if (names.length <= named) return names.join(', ');
+    return $localize`${names.slice(0, named).join(', ')}:names: and ${names.length - named}:count: more`;
+  }
 
   /** Goes where what a finding speaks of is entered. */
   protected goTo({ about }: Finding): void {
