@@ -21,7 +21,7 @@ export const programmeId = z.string().min(1).max(400);
 const span = { start_minutes: minutes, end_minutes: minutes };
 const momentSpan = z.strictObject(span);
 
-const lotInput = z.strictObject({
+export const lotInput = z.strictObject({
   lotId: programmeId,
   portions: z.int().min(1).max(60).nullable(),
   crew: z.int().min(1).max(8).nullable(),

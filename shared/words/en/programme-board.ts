@@ -14,6 +14,7 @@ export const programmeBoard = {
     '{task} takes {crew, plural, one {one person} other {# people}} of {grade} at once, and there {people, plural, =0 {is nobody} one {is one} other {are #}}.',
   'programme-place-short':
     '{lot} takes {amount, plural, one {one place} other {# places}} of {place}, and there {capacity, plural, one {is one} other {are #}}.',
+  'programme-lot-fewer-may': 'At least the {crew, plural, one {one} other {#}} it takes.',
   'programme-in-portions':
     '{step} and what follows it are planned in {portions, plural, one {# portion} other {# portions}}, so that each stays inside its time.',
   'programme-no-plan': 'There is no plan yet.',

@@ -11,6 +11,7 @@ import { DatedRibbon } from '../ribbon/dated-ribbon';
 import { RibbonTable } from '../ribbon/ribbon-table';
 import type { DraggedTask } from '../ribbon/task-drag';
 import { ApprovalList } from './approval-list';
+import { LotList } from './lot-list';
 import { movedConsequences } from './pinned-request';
 import { Planner } from './planner';
 import { PlanWords } from './plan-words';
@@ -29,6 +30,7 @@ import { WhatIfPanel } from './what-if-panel';
     DatedRibbon,
     FindingList,
     FormComplaint,
+    LotList,
     MatButton,
     ProgrammeStart,
     RibbonTable,
@@ -66,6 +68,8 @@ export class EstimateProgramme {
   protected readonly lotName = $localize`Lot`;
   protected readonly movesLittle = signal(false);
   protected readonly chosen = signal<string | undefined>(undefined);
+  /** The lot whose way of working is being changed. */
+  protected readonly changedLot = signal<string | undefined>(undefined);
   protected readonly moved = signal<DraggedTask | undefined>(undefined);
 
   protected readonly lots = computed(() => this.shown.lots());
@@ -89,11 +93,15 @@ export class EstimateProgramme {
       (this.store.answer()?.items.length ?? 0) === 0 ||
       (this.store.answer()?.findings ?? []).some(({ kind }) => kind === 'refuse'),
   );
-  protected readonly chosenTask = computed(() =>
-    this.lots()
-      .flatMap(({ tasks }) => tasks)
-      .find(({ id }) => id === this.chosen()),
+  protected readonly chosenLot = computed(() =>
+    this.lots().find(({ tasks }) => tasks.some(({ id }) => id === this.chosen())),
   );
+  protected readonly chosenTask = computed(() => this.chosenLot()?.tasks.find(({ id }) => id === this.chosen()));
+  /** Coating may be done in portions and by several; carving is shared as it comes. */
+  protected readonly isCoated = computed(() => {
+    const item = this.store.answer()?.items.find(({ taskId }) => taskId === this.chosen());
+    return item !== undefined && item.kind !== 'carving';
+  });
   /** What becomes impossible, said while a task is still being moved. */
   protected readonly consequences = computed(() => {
     const [moved, plan, request] = [this.moved(), this.store.plan(), this.store.answer()?.request];

@@ -1,7 +1,9 @@
 import { Injectable, computed, inject } from '@angular/core';
 import { compareDays } from '#shared/calendar/add-days';
+import { overtime_percent } from '#shared/programme/cost-of-remedy';
 import { dayOfMinutes } from '#shared/programme/programme-frame';
 import type { Programme } from '#shared/programme/programme-plan';
+import type { WordCode } from '#shared/words/word-code';
 import { Formats } from '../../core/formats/formats';
 import { Words } from '../../core/formats/words';
 import { idleReasons } from './idle-reasons';
@@ -32,10 +34,12 @@ export class PlanWords {
     if (!answer) return '';
     const carved = new Set(answer.items.filter(({ kind }) => kind === 'carving').map(({ lotId }) => lotId));
     const lots = new Set(answer.items.map(({ lotId }) => lotId)).size - carved.size;
-    const [coated, members, people] = [lots, carved.size, answer.request.people.length].map((one) => this.count(one));
-    return carved.size > 0
-      ? $localize`${coated}:lots: lots, ${members}:members: carved members, ${people}:people: people`
-      : $localize`${coated}:lots: lots, ${people}:people: people`;
+    const people = answer.request.people.length;
+    return [
+      lots === 1 ? $localize`one lot` : $localize`${this.count(lots)}:lots: lots`,
+      ...(carved.size === 0 ? [] : [this.carved(carved.size)]),
+      people === 1 ? $localize`one person` : $localize`${this.count(people)}:people: people`,
+    ].join(', ');
   });
   readonly chips = computed<readonly string[]>(() => [...this.startChips(), ...this.planChips()]);
   readonly idle = computed(() => {
@@ -64,13 +68,28 @@ export class PlanWords {
       return $localize`A new plan, not kept yet: ready on ${at}:moment:, ${time}:time: sooner than before.`;
     return $localize`A new plan, not kept yet: ready on ${at}:moment:.`;
   });
-  /** What would help, each with when it would be ready. */
+  /** What would help, each with when it would be ready and, for those who see cost, what it costs more. */
   readonly helps = computed(() =>
-    (this.planning.remedies() ?? []).flatMap(({ code, values, plan }) => {
+    (this.planning.remedies() ?? []).flatMap(({ code, values, plan, cost_minor }) => {
       const at = this.moment(plan.finish_minutes);
-      return at ? [`${this.words.say(code, this.named(values))} ${$localize`Ready on ${at}:moment:.`}`] : [];
+      const [way, ready] = [this.words.say(code, this.named(values)), $localize`Ready on ${at ?? ''}:moment:.`];
+      return at ? [[way, ready, ...this.costOf(code, cost_minor)].join(' ')] : [];
     }),
   );
+
+  private costOf(code: WordCode, cost_minor: number | null): string[] {
+    if (cost_minor === null) return [];
+    if (cost_minor === 0) return [$localize`It costs the workshop no more.`];
+    const amount = this.formats.money(Math.abs(cost_minor));
+    if (cost_minor < 0) return [$localize`It costs the workshop ${amount}:amount: less.`];
+    if (code !== 'programme-remedy-longer-day') return [$localize`It costs the workshop ${amount}:amount: more.`];
+    const premium = this.formats.figure('percent', overtime_percent);
+    return [$localize`It costs the workshop ${amount}:amount: more, with ${premium}:premium: on top for overtime.`];
+  }
+
+  private carved(members: number): string {
+    return members === 1 ? $localize`one carved member` : $localize`${this.count(members)}:members: carved members`;
+  }
 
   private startChips(): string[] {
     const answer = this.store.answer();

@@ -1,7 +1,7 @@
 import { DestroyRef, Injectable, inject, signal } from '@angular/core';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { Remedy } from '#shared/programme/programme-remedies';
-import type { ProgrammeRequest } from '#shared/programme/programme-request';
+import type { OtherSize, ProgrammeRequest } from '#shared/programme/programme-request';
 import type { PagePlanningAnswer, PagePlanning } from '#shared/programme/page-planning';
 import { PLANNING_STARTER } from './planning-starter';
 
@@ -32,8 +32,12 @@ export class Planner {
   }
 
   /** What would help a task that finds no time. */
-  async remedies(request: ProgrammeRequest, taskId: string): Promise<readonly Remedy[]> {
-    const answer = await this.ask({ request, search: {}, seconds: 0, helpsTask: taskId });
+  async remedies(
+    request: ProgrammeRequest,
+    taskId: string,
+    otherSizes: readonly OtherSize[],
+  ): Promise<readonly Remedy[]> {
+    const answer = await this.ask({ request, search: {}, seconds: 0, helpsTask: taskId, otherSizes });
     return 'remedies' in answer ? answer.remedies : [];
   }
 

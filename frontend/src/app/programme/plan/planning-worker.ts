@@ -6,9 +6,9 @@ const tell = (answer: PagePlanningAnswer): void => postMessage(answer);
 
 /** Plans away from the page, and tells of each better plan on the way. */
 addEventListener('message', ({ data }: MessageEvent<PagePlanning>) => {
-  const { request, search, seconds, helpsTask } = data;
+  const { request, search, seconds, helpsTask, otherSizes = [] } = data;
   if (helpsTask !== undefined) {
-    tell({ remedies: programmeRemedies(request, helpsTask, { otherSizes: [] }) });
+    tell({ remedies: programmeRemedies(request, helpsTask, { otherSizes }) });
     return;
   }
   const ends_milliseconds = performance.now() + seconds * 1000;

@@ -2,7 +2,6 @@ import { DestroyRef, Injectable, computed, inject, signal } from '@angular/core'
 import type { SolutionAnswer } from '#shared/programme/solution-schema';
 import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import type { Programme } from '#shared/programme/programme-plan';
-import type { Remedy } from '#shared/programme/programme-remedies';
 import type { Finding } from '#shared/words/finding';
 import { Notices } from '../../core/problems/notices';
 import { ProblemError } from '../../core/problems/problem-error';
@@ -10,6 +9,7 @@ import { pinnedRequest } from './pinned-request';
 import { Planner, PlanningStopped } from './planner';
 import { ProgrammeClient } from './programme-client';
 import { ProgrammeStore } from './programme-store';
+import { type CostedRemedy, RemedyCosts } from './remedy-costs';
 
 const seconds = 20;
 const replanSeconds = 4;
@@ -23,9 +23,10 @@ export class ProgrammePlanning {
   private readonly store = inject(ProgrammeStore);
   private readonly client = inject(ProgrammeClient);
   private readonly notices = inject(Notices);
+  private readonly costs = inject(RemedyCosts);
   private readonly ended = new AbortController();
   private readonly failed = signal<Programme | undefined>(undefined);
-  private readonly ways = signal<readonly Remedy[] | undefined>(undefined);
+  private readonly ways = signal<readonly CostedRemedy[] | undefined>(undefined);
   private readonly running = signal<SolutionAnswer | undefined>(undefined);
 
   readonly isWorking = computed(() => this.planner.isWorking() || this.running() !== undefined);
@@ -62,10 +63,14 @@ export class ProgrammePlanning {
     return found ? this.take(found, inputs) : false;
   }
 
-  /** Tries what would help the task that finds no time. */
+  /** Tries what would help the task that finds no time, other sizes of its lot among it, and reckons what that costs. */
   async help(): Promise<void> {
-    const [request, about] = [this.store.answer()?.request, this.findings().find(({ about }) => about)?.about];
-    if (request && about) this.ways.set(await this.planner.remedies(request, about));
+    const [answer, about] = [this.store.answer(), this.findings().find(({ about }) => about)?.about];
+    if (!answer || !about) return;
+    const lotId = answer.items.find(({ taskId }) => taskId === about)?.lotId ?? '';
+    const sizes = answer.otherSizes.filter((size) => size.lotId === lotId);
+    const remedies = await this.planner.remedies(answer.request, about, sizes);
+    await this.told(async () => this.ways.set(await this.costs.of(answer, lotId, remedies)));
   }
 
   async planOnServer(): Promise<void> {

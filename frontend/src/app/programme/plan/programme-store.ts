@@ -10,7 +10,8 @@ import {
 import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeSearch } from '#shared/programme/programme-request';
-import type { ProgrammeAnswer } from '#shared/programme/programme-schema';
+import { programmeSchema, type ProgrammeAnswer } from '#shared/programme/programme-schema';
+import { mergedValues } from '#shared/rate-cards/merged-values';
 import { shiftedPlan } from '#shared/programme/shifted-plan';
 import { NOW } from '../../core/now';
 import { ProblemError } from '../../core/problems/problem-error';
@@ -21,6 +22,9 @@ export interface Proposal {
   readonly plan: Programme;
   readonly inputs: ProgrammeInputs | null;
 }
+
+/** The programme as somebody else kept it meanwhile. */
+const standing = programmeSchema.pick({ version: true, inputs: true });
 
 const frameOf = ({ firstDay, startsAt, timeZone }: ProgrammeAnswer): ProgrammeFrame => ({
   ...{ firstDay, timeZone },
@@ -91,9 +95,24 @@ export class ProgrammeStore {
   /** Keeps other inputs; what stood as a proposal was made from others and falls away. */
   async keepInputs(change: Partial<ProgrammeInputs>): Promise<boolean> {
     return this.attempt(async ({ estimateId, version, inputs }) => {
-      this.take(await this.client.keep({ estimateId, version }, { ...inputs, ...change }));
+      const mine = { ...inputs, ...change };
+      const sent = this.client.keep({ estimateId, version }, mine);
+      this.take(await sent.catch((error: unknown) => this.joined(error, { estimateId, base: inputs, mine })));
       this.suggested.set(undefined);
     });
+  }
+
+  /** Somebody was faster: where they changed other inputs, both stand; else the refusal does. */
+  private joined(
+    error: unknown,
+    { estimateId, base, mine }: { estimateId: string; base: ProgrammeInputs; mine: ProgrammeInputs },
+  ): Promise<ProgrammeAnswer> {
+    const stands = error instanceof ProblemError && error.isStale && standing.safeParse(error.problem.current);
+    if (!stands || !stands.success) throw error;
+    const { version, inputs: theirs } = stands.data;
+    const { value, overlaps } = mergedValues<ProgrammeInputs>({ base, mine, theirs }, () => 'mine');
+    if (overlaps.length > 0) throw error;
+    return this.client.keep({ estimateId, version }, value);
   }
 
   /** The server checks the plan against every rule before it keeps it. */

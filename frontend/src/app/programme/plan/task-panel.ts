@@ -18,6 +18,11 @@ import { ProgrammeStore } from './programme-store';
     @for (sentence of told(); track $index) {
       <p>{{ sentence }}</p>
     }
+    @if (isCoated()) {
+      <div class="actions no-print">
+        <button matButton type="button" (click)="lotAsked.emit()" i18n>How this lot is worked</button>
+      </div>
+    }
     @if (one.isMovable) {
       <form class="row no-print" (submit)="$event.preventDefault(); put(at.value)">
         <label [for]="'task-at'" i18n>Start at</label>
@@ -68,6 +73,9 @@ export class TaskPanel {
   readonly isBusy = input(false);
   /** A time was typed: the minute of the programme. */
   readonly placed = output<number>();
+  /** Whether its lot may be worked otherwise. */
+  readonly isCoated = input(false);
+  readonly lotAsked = output();
   readonly freed = output();
   readonly closed = output();
 

@@ -30,14 +30,15 @@ export const asItIs: WhatIf = { day: null, climate: null, furtherGradeIds: [], l
 /** Long enough for a plan that can be compared. */
 const seconds = 6;
 
-const frameOf = ({ firstDay, startsAt, timeZone }: WhatIfAnswer): ProgrammeFrame => ({
+/** How minutes of an answer are read. */
+export const frameOfWhatIf = ({ firstDay, startsAt, timeZone }: WhatIfAnswer): ProgrammeFrame => ({
   ...{ firstDay, timeZone },
   startsAt_ms: Date.parse(startsAt),
 });
 
 function compared(name: string, answer: WhatIfAnswer, plan: Programme): ComparedWay {
   const { request, rates, setUp_hours, digits } = answer;
-  const frame = frameOf(answer);
+  const frame = frameOfWhatIf(answer);
   const hands_minor = costOfFurtherHands(plan, { request, frame, rates, setUp_hours, digits });
   return {
     name,
@@ -88,7 +89,7 @@ export class WhatIfComparison {
 
   private async worked(estimateId: string, { direction, day }: ProgrammeInputs, way: AskedWay): Promise<ComparedWay> {
     const answer = await this.client.whatIf(estimateId, way.whatIf);
-    const until = minutesOfDay(addDays(way.whatIf.day ?? day, 1), frameOf(answer));
+    const until = minutesOfDay(addDays(way.whatIf.day ?? day, 1), frameOfWhatIf(answer));
     const incumbent = this.first;
     const search = direction === 'backward' ? { backwardFrom_minutes: until } : incumbent ? { incumbent } : {};
     const plan = await this.planner.plan({ request: answer.request, search, seconds });

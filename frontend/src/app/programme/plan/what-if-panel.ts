@@ -113,7 +113,6 @@ export class WhatIfPanel {
   private line(way: ComparedWay, first: ComparedWay) {
     const { readyAt, findings, costDifference_minor: difference } = way;
     const why = findings.map(({ code, values }) => this.words.say(code, values)).join(' ');
-    const sign = difference < 0 ? '− ' : '+ ';
     return {
       name: way.name,
       ready: readyAt
@@ -121,7 +120,8 @@ export class WhatIfPanel {
         : $localize`cannot be planned`,
       later: readyAt ? this.later(readyAt, first.readyAt) : why,
       cost: this.formats.money(way.cost_minor),
-      difference: difference === 0 ? '–' : `${sign}${this.formats.money(Math.abs(difference))}`,
+      difference:
+        difference === 0 ? '–' : this.formats.signed(difference, (size_minor) => this.formats.money(size_minor)),
     };
   }
 

@@ -4,21 +4,9 @@ import { provideRouter } from '@angular/router';
 import { programmeFrame } from '#shared/programme/programme-frame';
 import { signIn, words } from '../../../test/sign-in';
 import { DatedRibbon } from './dated-ribbon';
-import { ribbonForSpecs, ribbonLot, ribbonTask } from './ribbon-for-specs';
+import { ribbonForSpecs, ribbonLot, ribbonTask, StillObserver } from './ribbon-for-specs';
 import type { RibbonLot } from './ribbon-lot';
 import type { DraggedTask } from './task-drag';
-
-class StillObserver {
-  observe(): void {
-    return;
-  }
-  unobserve(): void {
-    return;
-  }
-  disconnect(): void {
-    return;
-  }
-}
 
 describe('DatedRibbon', () => {
   let fixture: ComponentFixture<DatedRibbon>;

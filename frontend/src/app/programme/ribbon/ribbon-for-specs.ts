@@ -23,3 +23,16 @@ export const ribbonForSpecs = (lots: number, steps: number): RibbonLot[] =>
       Array.from({ length: steps }, (_step, step) => ribbonTask(`${lot}/${step}`, lot * 30 + step * 360)),
     ),
   );
+
+/** Nothing changes its size in a test. */
+export class StillObserver {
+  observe(): void {
+    return;
+  }
+  unobserve(): void {
+    return;
+  }
+  disconnect(): void {
+    return;
+  }
+}

@@ -1,0 +1,185 @@
+import { inputBinding } from '@angular/core';
+import { TestBed, type ComponentFixture } from '@angular/core/testing';
+import { provideRouter } from '@angular/router';
+import type { Role } from '#shared/actor/role';
+import type { PagePlanning } from '#shared/programme/page-planning';
+import { programme } from '#shared/programme/programme';
+import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
+import type { ProgrammeAnswer } from '#shared/programme/programme-schema';
+import { signIn, words } from '../../../test/sign-in';
+import { NOW } from '../../core/now';
+import { AnsweringServer, type AskedParts, buttonIn, refusal, spoken } from '../answering-for-specs';
+import { StillObserver } from '../ribbon/ribbon-for-specs';
+import { EstimateProgramme } from './estimate-programme';
+import { PLANNING_STARTER } from './planning-starter';
+import { programmeForSpecs } from './programme-for-specs';
+
+/** A worker that plans where it stands. */
+class PlanningHere extends EventTarget {
+  readonly terminate = jest.fn();
+  postMessage({ request, search }: PagePlanning): void {
+    const plan = programme(request, search);
+    queueMicrotask(() => this.dispatchEvent(new MessageEvent('message', { data: { plan } })));
+  }
+}
+
+describe('EstimateProgramme', () => {
+  let fixture: ComponentFixture<EstimateProgramme>;
+  let server: AnsweringServer;
+  let told: (string | undefined)[];
+  const element = () => fixture.nativeElement as HTMLElement;
+  const settle = async () => {
+    for (let turn = 0; turn < 3; turn += 1) {
+      await fixture.whenStable();
+      await new Promise((resolve) => setTimeout(resolve));
+      TestBed.tick();
+    }
+  };
+  const stands = programmeForSpecs();
+  const keptInputs = ({ body, version }: AskedParts): ProgrammeAnswer =>
+    programmeForSpecs({ inputs: body as ProgrammeAnswer['inputs'], version: (version ?? 0) + 1 });
+
+  afterEach(() => jest.restoreAllMocks());
+
+  interface Opened {
+    readonly read?: Partial<ProgrammeAnswer>;
+    readonly roles?: readonly Role[];
+    readonly keep?: (parts: AskedParts) => unknown;
+  }
+  async function open({ read = {}, roles = ['estimator'], keep = keptInputs }: Opened = {}) {
+    globalThis.ResizeObserver = StillObserver;
+    jest.spyOn(HTMLElement.prototype, 'clientWidth', 'get').mockReturnValue(1200);
+    jest.spyOn(HTMLElement.prototype, 'clientHeight', 'get').mockReturnValue(600);
+    told = [];
+    server = new AnsweringServer({
+      readProgramme: () => programmeForSpecs(read),
+      readShop: () => ({ content: { people: [{ id: 'gina', name: 'Gina' }] } }),
+      keepProgramme: keep,
+      keepPlan: ({ body, version }) =>
+        programmeForSpecs({ plan: body as ProgrammeAnswer['plan'], version: (version ?? 0) + 1 }),
+    });
+    const now = { provide: NOW, useValue: () => new Date('2027-01-04T09:00:00Z') };
+    const starter = { provide: PLANNING_STARTER, useValue: () => Promise.resolve(new PlanningHere()) };
+    TestBed.configureTestingModule({ providers: [words, provideRouter([]), server.provider, starter, now] });
+    signIn(roles);
+    fixture = TestBed.createComponent(EstimateProgramme, {
+      bindings: [
+        inputBinding('estimateId', () => stands.estimateId),
+        inputBinding('tellsDay', () => (day: string | undefined) => told.push(day)),
+      ],
+    });
+    await settle();
+  }
+  async function press(text: string, within: Element = element()) {
+    buttonIn(within, text).click();
+    await settle();
+  }
+  async function type(label: string, text: string) {
+    const field = [...element().querySelectorAll('app-field')].find(
+      (one) => spoken(one.querySelector('label')) === label,
+    );
+    const input = field?.querySelector('input') as HTMLInputElement;
+    input.value = text;
+    input.dispatchEvent(new Event('input'));
+    await settle();
+  }
+  const keptLots = (at: number) => (server.of('keepProgramme')[at].body as ProgrammeInputs).lots;
+  const openLot = async () => {
+    (element().querySelector('[aria-label="Change how Legs is worked"]') as HTMLButtonElement).click();
+    await settle();
+  };
+
+  it('says when it is ready, by whom each task is done, and tells the offered day', async () => {
+    await open();
+    expect(spoken(element().querySelector('h2'))).toMatch(/^Ready on \w+day \d+ January/);
+    const stories = [...element().querySelectorAll('g.task')].map((one) => one.getAttribute('aria-label'));
+    expect(stories.find((one) => one?.startsWith('Lay – Legs'))).toContain('Gina');
+    expect(told.at(-1)).toBe('2027-01-11');
+  });
+
+  it('says that a plan has to be made again once something changed under it, and offers no day', async () => {
+    await open({ read: { isCurrent: false } });
+    expect(spoken(element())).toContain('Something this plan rests on has changed since it was kept.');
+    expect(told.at(-1)).toBeUndefined();
+  });
+
+  it('plans in a worker, proposes what came of it, and keeps that', async () => {
+    await open({ read: { plan: null, dates: null } });
+    expect(spoken(element().querySelector('h2'))).toBe('Not planned yet');
+    await press('Plan it');
+    expect(spoken(element())).toContain('A new plan, not kept yet: ready on');
+    await press('Keep this plan');
+    const [{ version, body }] = server.of('keepPlan');
+    expect([version, (body as NonNullable<ProgrammeAnswer['plan']>).tasks.length]).toEqual([2, 4]);
+    expect(spoken(element().querySelector('h2'))).toMatch(/^Ready on/);
+  });
+
+  it('is only read by the office', async () => {
+    await open({ roles: ['office'] });
+    const buttons = [...element().querySelectorAll('button')].map(spoken);
+    expect(buttons).not.toContain('Plan it');
+    expect(buttons).not.toContain('Change');
+  });
+
+  it('keeps how a lot is worked, in portions and by several', async () => {
+    await open();
+    await openLot();
+    await type('Portions', '2');
+    await type('People who may share it', '2');
+    await press('Keep it so');
+    expect(keptLots(0)).toEqual([{ lotId: 'legs', portions: 2, crew: null, mostPeople: 2, places: null }]);
+    expect(element().querySelector('app-lot-form')).toBeNull();
+  });
+
+  it('says beside the entry what a lot cannot have, and sends nothing', async () => {
+    await open();
+    await openLot();
+    await type('Places it takes on Long rack', '5');
+    await press('Keep it so');
+    expect(spoken(element().querySelector('app-lot-form .complaint'))).toBe(
+      'Legs takes 5 places of Long rack, and there are 2.',
+    );
+    expect(server.of('keepProgramme')).toEqual([]);
+  });
+
+  it('keeps what two people entered at once, where it is not the same', async () => {
+    const theirs = { ...stands.inputs, inHand_days: 5 };
+    const keep = (parts: AskedParts) => {
+      if (parts.version === 2) throw refusal(412, 'Somebody was faster.', { current: { version: 3, inputs: theirs } });
+      return keptInputs(parts);
+    };
+    await open({ keep });
+    await openLot();
+    await type('People it takes at once', '2');
+    await press('Keep it so');
+    const [, { version, body }] = server.of('keepProgramme');
+    expect([version, (body as ProgrammeInputs).inHand_days]).toEqual([3, 5]);
+    expect(keptLots(1)).toEqual([{ lotId: 'legs', portions: null, crew: 2, mostPeople: null, places: null }]);
+  });
+
+  it('leads from a task to how its lot is worked', async () => {
+    await open();
+    const lay = [...element().querySelectorAll('g.task')].find((one) =>
+      one.getAttribute('aria-label')?.startsWith('Lay'),
+    );
+    lay?.dispatchEvent(new MouseEvent('click', { bubbles: true }));
+    await settle();
+    await press('How this lot is worked');
+    expect(spoken(element().querySelector('app-lot-form'))).toContain('Portions');
+  });
+
+  it('says why there is no plan at a time nobody works, and changes nothing', async () => {
+    await open();
+    const lay = [...element().querySelectorAll('g.task')].find((one) =>
+      one.getAttribute('aria-label')?.startsWith('Lay'),
+    );
+    lay?.dispatchEvent(new MouseEvent('click', { bubbles: true }));
+    await settle();
+    const at = element().querySelector('#task-at') as HTMLInputElement;
+    at.value = `${at.value.slice(0, 10)}T03:00`;
+    at.closest('form')?.dispatchEvent(new Event('submit'));
+    await settle();
+    expect(spoken(element())).toContain('There is no such plan. Nothing was changed.');
+    expect([server.of('keepPlan'), server.of('keepProgramme')]).toEqual([[], []]);
+  });
+});
