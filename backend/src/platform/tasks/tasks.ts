@@ -36,8 +36,6 @@ export type TaskHandler<Content> = (content: Content, task: Task<Content>) => Pr
 
 const mostAttempts = 12;
 const pause_milliseconds = 1_000;
-/** Tasks looked at for one that no other worker has in hand: more than there are workers. */
-const looked = 50;
 
 /** 10 s, 20 s, 40 s … up to six hours between attempts, a tenth more or less by chance so that failures do not march in step. */
 const backOff_milliseconds = (attempts: number): number =>
@@ -105,7 +103,7 @@ export class Tasks {
   async stop(): Promise<void> {
     clearInterval(this.timer);
     this.isStopping = true;
-    await Promise.all(this.lanes.map(({ round }) => round));
+    await Promise.all(this.lanes.flatMap(({ round }) => round ?? []));
   }
 
   /** Runs whatever is due of some kinds, of all where none are named, one after the other until nothing is left. */
@@ -164,14 +162,14 @@ export class Tasks {
   }
 
   /**
-   * Locks the first task that is due and in nobody's hands. What is due is read first, and then locked by its id alone: a locking search would hold every row
-   * it passes, those of other kinds among them, for as long as the task takes.
+   * Locks the first task that is due and in nobody's hands. What is due is read first (more than there are workers), and then locked by its id alone: a
+   * locking search would hold every row it passes, those of other kinds among them, for as long as the task takes.
    */
   private async take(kinds: readonly string[]): Promise<Task | undefined> {
     const now = this.clock.now();
     const due = await this.database.select<{ id: string }>(
       `SELECT id FROM tasks WHERE failed_at IS NULL AND run_after <= :now AND kind IN (:kinds)
-       ORDER BY run_after, id LIMIT ${String(looked)}`,
+       ORDER BY run_after, id LIMIT 50`,
       { now, kinds: [...kinds, ''] },
     );
     for (const { id } of due) {

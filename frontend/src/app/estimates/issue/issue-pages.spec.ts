@@ -3,7 +3,7 @@ import { ActivatedRoute, convertToParamMap, provideRouter, Router } from '@angul
 import { of } from 'rxjs';
 import type { Type } from '@angular/core';
 import type { Role } from '#shared/actor/role';
-import type { PricedIssueSummary } from '#shared/estimates/issue-schema';
+import type { FrozenDates as Dates, PricedIssueSummary } from '#shared/estimates/issue-schema';
 import { EstimateServer, ids, refusal, workspaceOn } from '../../../test/estimate-server';
 import { signIn, words } from '../../../test/sign-in';
 import { Confirm } from '../../ui/dialog/confirm';
@@ -131,9 +131,9 @@ describe('The pages of issues', () => {
     it('tells what is new line by line, and what it comes to', async () => {
       await open(IssuePage);
       expect(spoken(element().querySelector('summary'))).toContain(
-        'One line differs from issue A, together by + €2.50',
+        'One line differs from issue A, together by +€2.50',
       );
-      expect(spoken(element().querySelector('app-difference-table'))).toContain('Top edge, Carving 10.0012.50+ 2.50');
+      expect(spoken(element().querySelector('app-difference-table'))).toContain('Top edge, Carving 10.0012.50+2.50');
     });
 
     it('shows the paper as the client will have it: letterhead, address, lines without cost, until when prices hold', async () => {
@@ -279,9 +279,9 @@ describe('The pages of issues', () => {
     });
 
     it('shows the dates it was made with and what they assume, to the office as well', async () => {
-      const assumptions = [
-        { kind: 'note', code: 'programme-assumes-in-hand', values: { days: 3 } } as const,
-        { kind: 'note', code: 'programme-assumes-promised', values: { jobs: 2 } } as const,
+      const assumptions: Dates['assumptions'] = [
+        { kind: 'note', code: 'programme-assumes-in-hand', values: { days: 3 } },
+        { kind: 'note', code: 'programme-assumes-promised', values: { jobs: 2 } },
       ];
       const days = { startsOn: '2026-03-09', finishesOn: '2026-04-17', offeredOn: '2026-04-24', workingDays: 30 };
       read = { dates: { ...days, assumptions } };
@@ -296,7 +296,7 @@ describe('The pages of issues', () => {
       server.settings = { ...server.settings, alternatives: [alternative] };
       read = { alternatives: [{ id: ids.leg, gross_minor: 55_000, difference_minor: -5000 }] };
       await open(IssueViewPage, view);
-      expect(spoken(element().querySelector('app-frozen-alternatives tbody'))).toBe('Bare at the back€550.00− €50.00');
+      expect(spoken(element().querySelector('app-frozen-alternatives tbody'))).toBe('Bare at the back€550.00−€50.00');
     });
   });
 
