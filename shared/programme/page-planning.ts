@@ -1,13 +1,14 @@
 import type { Programme } from '#shared/programme/programme-plan';
 import type { Remedy } from '#shared/programme/programme-remedies';
-import type { ProgrammeRequest, ProgrammeSearch } from '#shared/programme/programme-request';
+import type { OtherSize, ProgrammeRequest, ProgrammeSearch } from '#shared/programme/programme-request';
 
-/** What is planned, and for how long a better plan is looked for; `helpsTask`: what would help this task is tried instead. */
+/** What is planned, and for how long a better plan is looked for; `helpsTask`: what would help this task is tried instead, other sizes among it. */
 export interface PagePlanning {
   readonly request: ProgrammeRequest;
   readonly search: Omit<ProgrammeSearch, 'limit' | 'onBetter'>;
   readonly seconds: number;
   readonly helpsTask?: string;
+  readonly otherSizes?: readonly OtherSize[];
 }
 
 export type PagePlanningAnswer =

@@ -15,7 +15,9 @@ export const whatIfSchema = z.strictObject({
   day: day.nullable(),
   climate: climateSchema.nullable(),
   furtherGradeIds: z.array(cardItemId).max(6),
-  lots: z.array(z.strictObject({ lotId: programmeId, buildUpId: cardItemId })).max(500),
+  lots: z
+    .array(z.strictObject({ lotId: programmeId, buildUpId: cardItemId, onlySize: z.boolean().optional() }))
+    .max(500),
 }) satisfies z.ZodType<WhatIf>;
 
 /** What to solve, and money against the estimate as it stands; a plan's further people are set up besides (`costOfFurtherHands`). */

@@ -9,7 +9,14 @@ export interface WhatIf {
   /** Grades of further people who would be there from the start, each working the workshop's hours. */
   readonly furtherGradeIds: readonly string[];
   /** Lots on another build-up, as with a slower size. */
-  readonly lots: readonly { readonly lotId: string; readonly buildUpId: string }[];
+  readonly lots: readonly LotOtherwise[];
+}
+
+/** A lot on another build-up, or, where only its size is another, on its own build-up with the size of that one. */
+export interface LotOtherwise {
+  readonly lotId: string;
+  readonly buildUpId: string;
+  readonly onlySize?: boolean | undefined;
 }
 
 /** What an hour of a grade costs the workshop. */

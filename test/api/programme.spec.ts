@@ -518,6 +518,13 @@ describe('What if', () => {
     const size = await ask({ lots: [{ lotId, buildUpId: 'oil-12-hour' }] });
     expect(size.costDifference_minor).not.toBe(0);
     expect(size.items.map(({ kind }) => kind)).toContain('oil-size');
+    // A lot in water has no size to be changed; a lot in oil keeps its build-up but for that one step.
+    const onlySize = (buildUpId: string, of = lotId) => ({ lots: [{ lotId: of, buildUpId, onlySize: true }] });
+    const refused = await owner.call(readWhatIf, {
+      ...at(estimateId),
+      body: { day: null, climate: null, furtherGradeIds: [], ...onlySize('oil-12-hour') },
+    });
+    expect(refused.status).toBe(400);
     expect(
       (
         await owner.call(readWhatIf, {

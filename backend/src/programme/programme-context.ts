@@ -112,8 +112,8 @@ export class ProgrammeContexts {
   }
 }
 
-/** Another draft, shop or inputs than those that stand, to be asked about. */
-export type Otherwise = Partial<Pick<ProgrammeContext, 'draft' | 'shop' | 'inputs'>>;
+/** Another draft, card, shop or inputs than those that stand, to be asked about. */
+export type Otherwise = Partial<Pick<ProgrammeContext, 'draft' | 'card' | 'shop' | 'inputs'>>;
 
 const workOf = ({ draft, card }: Pick<ProgrammeContext, 'draft' | 'card'>): EstimateWork => estimateWork(draft, card);
 

@@ -1,9 +1,12 @@
 import { currencyDigits } from '#shared/money/currency-digits';
+import type { BuildUp } from '#shared/buildups/buildup';
 import type { Draft } from '#shared/estimates/draft';
+import type { Zone } from '#shared/estimates/member';
 import { zonesOfLot } from '#shared/estimates/zones-of-lot';
 import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import type { Shop } from '#shared/programme/shop';
-import type { WhatIf } from '#shared/programme/what-if';
+import { buildUpOnSize } from '#shared/programme/build-up-on-size';
+import type { LotOtherwise, WhatIf } from '#shared/programme/what-if';
 import type { WhatIfAnswer } from '#shared/programme/what-if-schema';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { Rejection } from '#shared/problems/rejection';
@@ -17,20 +20,40 @@ interface Parts {
   readonly priced: Estimates['priced'];
 }
 
-/** The draft with the zones of some lots on other build-ups; what the draft or the card does not hold is refused. */
-function draftWith(draft: Draft, lots: WhatIf['lots'], { buildUps }: RateCard): Draft {
+/** A draft with the card it is worked from. */
+interface Worked {
+  readonly draft: Draft;
+  readonly card: RateCard;
+}
+
+/** The build-up a zone has where its lot is worked otherwise; null where card or zone do not allow it. */
+function buildUpFor({ buildUpId: ownId }: Zone, { buildUpId, onlySize }: LotOtherwise, { buildUps }: RateCard) {
+  const find = (id: string) => buildUps.buildUps.find((buildUp) => buildUp.id === id) ?? null;
+  const [own, other] = [find(ownId), find(buildUpId)];
+  if (!onlySize || !other) return other;
+  return own && buildUpOnSize(own, other);
+}
+
+/** The draft with the zones of some lots on other build-ups, and the card with those that are made for it; what the draft or the card does not hold is refused. */
+function workedOtherwise({ draft, card }: Worked, lots: WhatIf['lots']): Worked {
+  const made = new Map<string, BuildUp>();
   const buildUpOf = new Map<string, string>();
-  lots.forEach(({ lotId, buildUpId }, at) => {
-    const zones = zonesOfLot(draft.members, lotId);
-    const isKnown = buildUps.buildUps.some(({ id }) => id === buildUpId);
-    if (zones.length === 0 || !isKnown) throw unknownLot(at);
-    for (const { zone } of zones) buildUpOf.set(zone.id, buildUpId);
+  lots.forEach((lot, at) => {
+    const zones = zonesOfLot(draft.members, lot.lotId);
+    if (zones.length === 0) throw unknownLot(at);
+    for (const { zone } of zones) {
+      const buildUp = buildUpFor(zone, lot, card);
+      if (!buildUp) throw unknownLot(at);
+      buildUpOf.set(zone.id, buildUp.id);
+      if (lot.onlySize) made.set(buildUp.id, buildUp);
+    }
   });
   const members = draft.members.map((member) => ({
     ...member,
     zones: member.zones.map((zone) => ({ ...zone, buildUpId: buildUpOf.get(zone.id) ?? zone.buildUpId })),
   }));
-  return { ...draft, members };
+  const buildUps = { ...card.buildUps, buildUps: [...card.buildUps.buildUps, ...made.values()] };
+  return { draft: { ...draft, members }, card: { ...card, buildUps } };
 }
 
 const unknownLot = (at: number): Rejection =>
@@ -66,12 +89,13 @@ export class WhatIfService {
     refuseFarInputs(inputs, { today: standing.today, timeZone: standing.frame.timeZone });
     const context = await this.parts.contexts.of(workshopId, estimateId, inputs);
     const { card, frame } = context;
-    const draft = draftWith(context.draft, asked.lots, card);
+    const otherwise = workedOtherwise(context, asked.lots);
     const shop = shopWith(context.shop, asked.furtherGradeIds);
-    const { request, items, findings } = programmeIn(context, 'today', { draft, shop, inputs });
+    const { request, items, findings } = programmeIn(context, 'today', { ...otherwise, shop, inputs });
     const { currency } = context.whole.estimate;
-    const price = (of: Draft) => this.parts.priced({ draft: of, choice: inputs.choice, card, currency });
-    const [before, after] = [await price(context.draft), await price(draft)];
+    const price = (of: Worked) =>
+      this.parts.priced({ draft: of.draft, card: of.card, choice: inputs.choice, currency });
+    const [before, after] = [await price(context), await price(otherwise)];
     return {
       ...presentFrame(frame),
       ...{ request, items: [...items] as WhatIfAnswer['items'], findings: [...findings] as WhatIfAnswer['findings'] },
