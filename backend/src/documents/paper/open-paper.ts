@@ -13,6 +13,8 @@ export interface PaperFacts {
   readonly size: 'A4' | 'Letter';
   /** Instant in UTC (ISO 8601). Nothing else in the file knows a time, so equal content is equal bytes. */
   readonly madeAt: string;
+  /** To be kept for years with what lies in it: marked as PDF/A-3b as well (ISO 19005-3), with the colours it means named. */
+  readonly isArchival?: boolean;
 }
 
 export type Pdf = PDFKit.PDFDocument;
@@ -28,6 +30,25 @@ function escapeDescription(pdf: Pdf): void {
   };
 }
 
+/** One mark of the library's at a time: beside that of ISO 19005-3 that of ISO 14289 is written here, and what it is is described, as the former asks. */
+const accessibleMark = `
+        <rdf:Description rdf:about="" xmlns:pdfaExtension="http://www.aiim.org/pdfa/ns/extension/" xmlns:pdfaSchema="http://www.aiim.org/pdfa/ns/schema#" xmlns:pdfaProperty="http://www.aiim.org/pdfa/ns/property#">
+            <pdfaExtension:schemas><rdf:Bag><rdf:li rdf:parseType="Resource">
+                <pdfaSchema:schema>PDF/UA identification</pdfaSchema:schema>
+                <pdfaSchema:namespaceURI>http://www.aiim.org/pdfua/ns/id/</pdfaSchema:namespaceURI>
+                <pdfaSchema:prefix>pdfuaid</pdfaSchema:prefix>
+                <pdfaSchema:property><rdf:Seq><rdf:li rdf:parseType="Resource">
+                    <pdfaProperty:name>part</pdfaProperty:name>
+                    <pdfaProperty:valueType>Integer</pdfaProperty:valueType>
+                    <pdfaProperty:category>internal</pdfaProperty:category>
+                    <pdfaProperty:description>Part of ISO 14289</pdfaProperty:description>
+                </rdf:li></rdf:Seq></pdfaSchema:property>
+            </rdf:li></rdf:Bag></pdfaExtension:schemas>
+        </rdf:Description>
+        <rdf:Description rdf:about="" xmlns:pdfuaid="http://www.aiim.org/pdfua/ns/id/">
+            <pdfuaid:part>1</pdfuaid:part>
+        </rdf:Description>`;
+
 /** A paper with no page yet: tagged, with its language and title, the fonts of the house embedded. */
 export function openPaper(facts: PaperFacts): Pdf {
   const fonts = paperFonts();
@@ -38,7 +59,7 @@ export function openPaper(facts: PaperFacts): Pdf {
     bufferPages: true,
     pdfVersion: '1.7',
     // The library knows this part of ISO 14289, its types do not yet.
-    subset: 'PDF/UA' as 'PDF/A-2',
+    subset: facts.isArchival ? 'PDF/A-3b' : ('PDF/UA' as 'PDF/A-2'),
     tagged: true,
     displayTitle: true,
     lang: facts.language,
@@ -55,6 +76,7 @@ export function openPaper(facts: PaperFacts): Pdf {
   });
   for (const [name, font] of Object.entries(fonts) as [PaperFont, Buffer][]) pdf.registerFont(name, font);
   escapeDescription(pdf);
+  if (facts.isArchival) (pdf as unknown as { appendXML: (xml: string) => void }).appendXML(accessibleMark);
   return pdf;
 }
 

@@ -129,6 +129,7 @@ export function invoicePaper(invoice: FrozenInvoice, parts: InvoicePaperParts): 
       language: words.language,
       size: invoice.workshop.paperSize === 'Letter' ? 'Letter' : 'A4',
       madeAt: invoice.issuedAt,
+      isArchival: true,
     },
     feet: {
       head: title,
