@@ -103,7 +103,7 @@ const doors = [
     to: {
       path: [
         '^backend/src/(app|main)\\.ts$',
-        '^frontend/src/(main|client|client-start|app/(app|app-routes|app-config|client-config|client-bootstrap))\\.ts$',
+        '^frontend/src/(main|client|client-start|app/(app|client-app|app-routes|app-config|client-config|client-bootstrap))\\.ts$',
         '^seeders/',
       ],
     },

@@ -18,11 +18,13 @@ const answer = (body: unknown, status = 200) => {
 /** A server that is asked, and what of it. */
 function served(visit: Response = answer({ token: 'of the visit', papers: papers([issue]) })) {
   const requests: [address: string, request: RequestInit][] = [];
-  const ahead = new AskedAhead((address, request = {}) => {
+  const show = jest.fn();
+  const ask = (address: unknown, request: RequestInit = {}) => {
     requests.push([address as string, request]);
-    return Promise.resolve(request.method === 'POST' ? visit : answer({ token: 'of the session' }));
-  });
-  return { ahead, requests, asked: () => requests.map(([address, { method }]) => `${method} ${address}`) };
+    return Promise.resolve(request.method === 'POST' ? visit : answer({ token: 'of the session', ...issue }));
+  };
+  const ahead = new AskedAhead(ask, show);
+  return { ahead, requests, show, asked: () => requests.map(([address, { method }]) => `${method} ${address}`) };
 }
 const settled = () => new Promise((resolve) => setTimeout(resolve));
 const called = ({ method, path }: { method: string; path: string }) => `${method.toUpperCase()} ${path}`;
@@ -37,6 +39,14 @@ describe('AskedAhead', () => {
     const [, [, visit]] = requests;
     expect(visit.headers).toMatchObject({ 'x-csrf-token': 'of the session', 'content-type': 'application/json' });
     expect(visit.body).toBe('{"token":"a-secret"}');
+  });
+
+  it('shows the head of the paper as soon as it is known', async () => {
+    const { ahead, show } = served();
+    ahead.begin({ pathname: `/client/issues/${issue.id}`, hash: '' });
+    await settled();
+    expect(show).toHaveBeenCalledTimes(1);
+    expect(show).toHaveBeenCalledWith(expect.objectContaining({ id: issue.id }));
   });
 
   it('has asked for the first paper before anybody hears of the visit', async () => {

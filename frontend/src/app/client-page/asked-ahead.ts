@@ -1,5 +1,7 @@
 import type { ClientOverview } from '#shared/client-page/client-overview-schema';
+import type { ClientIssue } from '#shared/client-page/client-issue-schema';
 import { firstPaper } from './first-paper';
+import { writeOpeningHead } from './opening-head';
 
 /**
  * What the first page of a client asks in any case, asked while the application itself is still on its way: each answer is given out
@@ -8,7 +10,10 @@ import { firstPaper } from './first-paper';
 export class AskedAhead {
   private readonly answers = new Map<string, Promise<Response>>();
 
-  constructor(private readonly ask: typeof fetch = (address, request) => fetch(address, request)) {}
+  constructor(
+    private readonly ask: typeof fetch = (address, request) => fetch(address, request),
+    private readonly show: (issue: ClientIssue) => void = (issue) => writeOpeningHead(document, issue),
+  ) {}
 
   /** Begins the visit whose secret an address holds, or asks for the paper it shows. */
   begin({ pathname, hash }: Pick<Location, 'pathname' | 'hash'>): void {
@@ -41,8 +46,16 @@ export class AskedAhead {
 
   private sendReading(page: string): void {
     if (page === '/client/papers') void this.send('GET', '/api/client/overview');
-    if (page.startsWith('/client/issues/')) void this.send('GET', `/api${page}`);
+    // What cannot be shown ahead is shown, or complained of, by the application.
+    if (page.startsWith('/client/issues/'))
+      this.send('GET', `/api${page}`)
+        .then(this.heardOf)
+        .catch(() => undefined);
   }
+
+  private readonly heardOf = async (answer: Response): Promise<void> => {
+    if (answer.ok) this.show((await answer.clone().json()) as ClientIssue);
+  };
 
   private send(method: string, address: string): Promise<Response> {
     return this.keep(method, address, this.ask(address, { method }));

@@ -1,7 +1,16 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  DOCUMENT,
+  afterRenderEffect,
+  computed,
+  inject,
+  input,
+} from '@angular/core';
 import { readClientLogo } from '#shared/client-page/client-issues-endpoints';
 import type { ClientLetterhead } from '#shared/client-page/client-letterhead-schema';
 import { addressOf } from '../core/api/address-of';
+import { uncover } from './opening-head';
 
 /** The workshop's own sheet: its name above, how to reach it below, and nothing of ours between. */
 @Component({
@@ -94,10 +103,18 @@ import { addressOf } from '../core/api/address-of';
   `,
 })
 export class ClientFrame {
+  private readonly document = inject(DOCUMENT);
+
   readonly letterhead = input<ClientLetterhead>();
 
   protected readonly logo = addressOf(readClientLogo);
   protected readonly address = computed(() =>
     (this.letterhead()?.addressLines ?? []).filter((line) => line !== this.letterhead()?.name).join(', '),
   );
+
+  constructor() {
+    afterRenderEffect(() => {
+      if (this.letterhead()) uncover(this.document);
+    });
+  }
 }

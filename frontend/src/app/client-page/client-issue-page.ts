@@ -21,16 +21,20 @@ import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
 import { PageTitle } from '../core/routing/page-title';
 import { Session } from '../core/session/session';
-import { FindingList } from '../ui/page/finding-list';
 import { Skeleton } from '../ui/page/skeleton';
-import { ClientDecline, ClientReview, ClientThread } from './answering';
-import { ClientChoices } from './client-choices';
 import { ClientFrame } from './client-frame';
 import { ClientIssueStore } from './client-issue-store';
-import { ClientLines } from './client-lines';
-import { ClientPayments } from './client-payments';
-import { ClientPieces } from './client-pieces';
 import { ClientRefused } from './client-refused';
+import {
+  ClientChoices,
+  ClientDecline,
+  ClientLines,
+  ClientPayments,
+  ClientPieces,
+  ClientReview,
+  ClientThread,
+  FindingList,
+} from './later-parts';
 
 /** An estimate as its client reads it: the piece, the choices, the price, the terms, questions, and the answer. */
 @Component({

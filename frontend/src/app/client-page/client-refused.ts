@@ -1,5 +1,6 @@
-import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, DOCUMENT, afterNextRender, inject, input } from '@angular/core';
 import { RouterLink } from '@angular/router';
+import { uncover } from './opening-head';
 
 /** What stands where a paper cannot be shown: why, and how to come to one's papers all the same. */
 @Component({
@@ -30,4 +31,9 @@ import { RouterLink } from '@angular/router';
 export class ClientRefused {
   readonly heading = input.required<string>();
   readonly text = input.required<string>();
+
+  constructor() {
+    const document = inject(DOCUMENT);
+    afterNextRender(() => uncover(document));
+  }
 }

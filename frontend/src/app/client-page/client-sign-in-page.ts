@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, inject, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, DOCUMENT, afterNextRender, inject, signal } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { askForClientSignIn } from '#shared/client-page/visits-endpoints';
@@ -8,6 +8,7 @@ import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
 import { FormComplaint } from '../ui/field/form-complaint';
 import { ClientFrame } from './client-frame';
+import { uncover } from './opening-head';
 
 /** A client with several jobs asks for a link to all of their papers; the answer does not say whether the address is known. */
 @Component({
@@ -48,6 +49,11 @@ export class ClientSignInPage {
 
   protected readonly form = schemaForm(askForClientSignIn.body, { email: '' });
   protected readonly sentTo = signal('');
+
+  constructor() {
+    const document = inject(DOCUMENT);
+    afterNextRender(() => uncover(document));
+  }
 
   protected async send(): Promise<void> {
     await this.form.send(async (body) => {
