@@ -10,6 +10,7 @@ import { systemClock } from './platform/clock/clock';
 import { readConfig, type Config } from './platform/config/config';
 import { refuseUnsafeSettings } from './platform/database/unsafe-settings';
 import { migrate } from './platform/database/migrate';
+import { startFailure } from './platform/database/start-failure';
 import { listen, stopListening } from './platform/listen';
 import { logDestination, openLog } from './platform/log/log';
 import { MailCatcher } from './platform/mail/mail-catcher';
@@ -60,7 +61,9 @@ function sweepNowAndThen(app: App, { log }: Platform): NodeJS.Timeout {
 /** Starts the server as the environment says, and answers how to stop it again. */
 async function start(): Promise<() => Promise<void>> {
   const config = readConfig(process.env);
-  await migrate(config.migrationDatabaseUrl, migrations);
+  await migrate(config.migrationDatabaseUrl, migrations).catch((error: unknown) => {
+    throw startFailure(error, config.migrationDatabaseUrl);
+  });
   const platform = openPlatform(config, systemClock, openLog(config.logLevel, logDestination(config.logFile)));
   await refuseUnsafeSettings(platform.database, config.mayBeUnsafe);
   const catcher = await connectMail(platform);

@@ -128,4 +128,23 @@ describe('A stranger', () => {
     http.expectNone('/api/foundations');
     expect(element().querySelectorAll('[aria-invalid="true"]').length).toBeGreaterThanOrEqual(3);
   });
+
+  it('goes with the country one chooses, but for what one chose oneself', async () => {
+    await open(NewWorkshopPage);
+    const choose = async (name: string, value: string) => {
+      const select = element().querySelector<HTMLSelectElement>(`select[formControlName="${name}"]`)!;
+      select.value = value;
+      select.dispatchEvent(new Event('change'));
+      await settle();
+    };
+    const habits = () =>
+      ['locale', 'currency', 'lengthUnit', 'paperSize'].map(
+        (name) => element().querySelector<HTMLSelectElement>(`[formControlName="${name}"]`)!.value,
+      );
+    await choose('country', 'JP');
+    expect(habits()).toEqual(['ja-JP', 'JPY', 'mm', 'A4']);
+    await choose('currency', 'CHF');
+    await choose('country', 'US');
+    expect(habits()).toEqual(['en-US', 'CHF', 'in', 'Letter']);
+  });
 });
