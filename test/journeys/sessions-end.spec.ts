@@ -42,6 +42,8 @@ it('asks over the page for the password when the session has ended, and sends wh
   await page.getByLabel('Length', { exact: true }).fill('2000');
   const dialog = page.getByRole('dialog').filter({ hasText: 'Please sign in again' });
   await dialog.waitFor();
+  // Who it is stands fixed, so one begins at the password.
+  await dialog.locator('app-password-field input:focus').waitFor();
   await see('journey session ended');
   expect(await contentOf(sample)).toMatchObject({ count: 2, shape: { length_mm: 1200 } });
   await dialog.getByRole('textbox', { name: 'Password' }).fill('not the right password');
