@@ -9,6 +9,7 @@ import {
 } from '#shared/accounts/session-endpoints';
 import { foundAnother, readWorkshop } from '#shared/accounts/workshop-endpoints';
 import { password, startApi, type Api, type TestPerson } from './start-api';
+import { newSessionId } from '../../backend/src/platform/session/new-session-id';
 import { foundingSettings } from './test-workshop';
 import { Visitor } from './visitor';
 
@@ -110,6 +111,12 @@ describe('its id', () => {
     expect(Buffer.from(id ?? '', 'base64url')).toHaveLength(32);
     const rows = await api.platform.database.select('SELECT * FROM sessions');
     expect(JSON.stringify(rows)).not.toContain(id);
+  });
+
+  test('is one of ten thousand that are all different and as long', () => {
+    const ids = Array.from({ length: 10_000 }, newSessionId);
+    expect(new Set(ids).size).toBe(10_000);
+    expect(ids.filter((id) => Buffer.from(id, 'base64url').length !== 32)).toEqual([]);
   });
 
   test('is not accepted with another signature', async () => {

@@ -4,6 +4,7 @@ import session from 'express-session';
 import { Passport } from 'passport';
 import { Strategy as LocalStrategy } from 'passport-local';
 import type { Config } from '../config/config';
+import { newSessionId } from '../session/new-session-id';
 import { markUnattended, type SessionStore } from '../session/session-store';
 import type { Identities, Identity, SessionControl, SignedIn, Visit, Visits } from '../session/session-control';
 
@@ -63,7 +64,7 @@ export class Sessions {
         cookie,
         resave: false,
         saveUninitialized: false,
-        genid: () => randomBytes(32).toString('base64url'),
+        genid: newSessionId,
       }),
       unattended,
       this.passport.session() as RequestHandler,
