@@ -2,8 +2,6 @@ import { inputBinding } from '@angular/core';
 import { TestBed, type ComponentFixture } from '@angular/core/testing';
 import { provideRouter } from '@angular/router';
 import type { Role } from '#shared/actor/role';
-import type { PagePlanning } from '#shared/programme/page-planning';
-import { programme } from '#shared/programme/programme';
 import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import type { ProgrammeAnswer } from '#shared/programme/programme-schema';
 import { signIn, words } from '../../../test/sign-in';
@@ -11,17 +9,9 @@ import { NOW } from '../../core/now';
 import { AnsweringServer, type AskedParts, buttonIn, refusal, spoken } from '../answering-for-specs';
 import { StillObserver } from '../ribbon/ribbon-for-specs';
 import { EstimateProgramme } from './estimate-programme';
+import { PlanningHere } from './planning-here-for-specs';
 import { PLANNING_STARTER } from './planning-starter';
 import { programmeForSpecs } from './programme-for-specs';
-
-/** A worker that plans where it stands. */
-class PlanningHere extends EventTarget {
-  readonly terminate = jest.fn();
-  postMessage({ request, search }: PagePlanning): void {
-    const plan = programme(request, search);
-    queueMicrotask(() => this.dispatchEvent(new MessageEvent('message', { data: { plan } })));
-  }
-}
 
 describe('EstimateProgramme', () => {
   let fixture: ComponentFixture<EstimateProgramme>;

@@ -1,0 +1,104 @@
+import { inputBinding } from '@angular/core';
+import { TestBed, type ComponentFixture } from '@angular/core/testing';
+import { programme } from '#shared/programme/programme';
+import { personForSpecs } from '#shared/programme/request-for-specs';
+import type { WhatIf } from '#shared/programme/what-if';
+import { signIn, words } from '../../../test/sign-in';
+import { AnsweringServer, buttonIn, spoken, type AskedParts } from '../answering-for-specs';
+import { PLANNING_STARTER } from './planning-starter';
+import { PlanningHere } from './planning-here-for-specs';
+import { programmeForSpecs } from './programme-for-specs';
+import { ProgrammeStore } from './programme-store';
+import { WhatIfPanel } from './what-if-panel';
+
+const answer = programmeForSpecs();
+
+describe('WhatIfPanel', () => {
+  let fixture: ComponentFixture<WhatIfPanel>;
+  let server: AnsweringServer;
+  const element = () => fixture.nativeElement as HTMLElement;
+  const settle = async () => {
+    for (let turn = 0; turn < 4; turn += 1) {
+      await fixture.whenStable();
+      await new Promise((resolve) => setTimeout(resolve));
+      TestBed.tick();
+    }
+  };
+
+  /** Another way costs 120 more, and whoever is there besides is really there. */
+  function whatIf({ body }: AskedParts): unknown {
+    const { furtherGradeIds, climate } = body as WhatIf;
+    const further = furtherGradeIds.map((gradeId, at) => personForSpecs(`further ${at}`, gradeId));
+    const isOther = furtherGradeIds.length > 0 || climate !== null;
+    const { request, items, firstDay, startsAt, timeZone } = answer;
+    const lags = request.lags.map((lag) => (climate && lag.fromTaskId === 'gesso' ? { ...lag, least: 2880 } : lag));
+    return {
+      ...{ firstDay, startsAt, timeZone, items, findings: [], rates: [], setUp_hours: 0, digits: 2 },
+      request: { ...request, lags, people: [...request.people, ...further] },
+      ...{ cost_minor: isOther ? 112_000 : 100_000, costDifference_minor: isOther ? 12_000 : 0 },
+      ...{ gross_minor: 150_000, grossDifference_minor: 0 },
+    };
+  }
+
+  async function open() {
+    server = new AnsweringServer({
+      readProgramme: () => answer,
+      readShop: () => ({ content: { people: [] } }),
+      readWhatIf: whatIf,
+    });
+    const starter = { provide: PLANNING_STARTER, useValue: () => Promise.resolve(new PlanningHere()) };
+    TestBed.configureTestingModule({ providers: [words, server.provider, starter, ProgrammeStore] });
+    signIn(['estimator']);
+    TestBed.inject(ProgrammeStore).open(answer.estimateId, 0);
+    fixture = TestBed.createComponent(WhatIfPanel, {
+      bindings: [inputBinding('lots', () => []), inputBinding('buildUps', () => [])],
+    });
+    await settle();
+  }
+  function tick(place: number, isOn: boolean) {
+    const box = element().querySelectorAll<HTMLInputElement>('input[type=checkbox]')[place];
+    box.checked = isOn;
+    box.dispatchEvent(new Event('change'));
+  }
+  const rows = () => [...element().querySelectorAll('tbody tr')].map((row) => [...row.children].map(spoken));
+
+  it('has nothing to compare until a way is chosen', async () => {
+    await open();
+    tick(1, false);
+    await settle();
+    expect(buttonIn(element(), 'Compare').disabled).toBe(true);
+  });
+
+  it('proposes one more of the grade with most to do', async () => {
+    await open();
+    const grade = element().querySelector('select') as HTMLSelectElement;
+    expect(grade.value).toBe('carver');
+  });
+
+  it('stands a colder workshop beside the programme as it is, by finish and cost', async () => {
+    await open();
+    tick(1, false);
+    tick(2, true);
+    await settle();
+    buttonIn(element(), 'Compare').click();
+    await settle();
+    const asked = server.of('readWhatIf').map(({ body }) => (body as WhatIf).climate);
+    expect(asked).toEqual([null, { temperature_celsius: 14, humidity_percent: 50 }]);
+    const own = programme(answer.request).finish_minutes ?? 0;
+    const [asItIs, cold] = rows();
+    expect(own).toBeGreaterThan(0);
+    expect([asItIs[0], asItIs[2], asItIs[3]]).toEqual(['As it is', '€1,000.00', '–']);
+    expect(cold[2]).toBe('€1,120.00');
+    expect(cold[3]).toMatch(/^\+\s?€120\.00$/);
+    expect(cold[1]).toMatch(/days? later$/);
+  });
+
+  it('is never later with one more pair of hands', async () => {
+    await open();
+    buttonIn(element(), 'Compare').click();
+    await settle();
+    const [, further] = rows();
+    expect(further[0]).toBe('One more: Carver');
+    expect(further[1]).not.toMatch(/later$/);
+  });
+});
