@@ -12,6 +12,7 @@ import { agreements } from './0040-agreements';
 import { programme } from './0045-programme';
 import { invoices } from './0050-invoices';
 import { takenBack } from './0051-taken-back';
+import { writtenOffBecause } from './0052-written-off-because';
 
 /** Every step of the schema, in the order in which they are taken. A step that was released is never changed. */
 export const migrations: readonly Migration[] = [
@@ -28,4 +29,5 @@ export const migrations: readonly Migration[] = [
   programme,
   invoices,
   takenBack,
+  writtenOffBecause,
 ];

@@ -1,8 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { Workbook } from 'exceljs';
 import { v7 as newId } from 'uuid';
-import { changeWorkshop, readWorkshop } from '#shared/accounts/workshop-endpoints';
-import type { Workshop } from '#shared/accounts/workshop-schema';
+import { writtenOffBecause } from '../../backend/migrations/0052-written-off-because';
 import type { Journal, OwedInCurrency, Payment, Statement } from '#shared/invoices/payment-schema';
 import {
   readJournal,
@@ -210,13 +209,12 @@ describe('what is owed', () => {
     );
   });
 
-  it('stays in the currency it was invoiced in where the workshop changes its own, and is never added to another', async () => {
+  it('stays in the currency it was invoiced in where the workshop has another by now, and is never added to another', async () => {
     const workshop = api.theirs;
     const own = workshop.people.owner.visitor;
     const old = await sampleInvoice(workshop);
-    const { version, logoFileId: _logo, id: _id, ...settings } = (await own.call(readWorkshop)).body as Workshop;
-    const changed = await own.call(changeWorkshop, { body: { ...settings, currency: 'SEK' }, version });
-    expect(changed.status).toBe(200);
+    // However it came about: what was invoiced before stays in what it was invoiced in.
+    await api.platform.database.execute("UPDATE workshops SET currency = 'SEK' WHERE id = :id", { id: workshop.id });
     const fresh = await sampleInvoice(workshop, { clientId: old.clientId });
     const owed = (await own.call(readOwed)).body as { currencies: OwedInCurrency[] };
     expect(owed.currencies.map(({ currency, open_minor }) => [currency, open_minor])).toEqual([
@@ -276,6 +274,26 @@ describe('what is owed', () => {
     const invoice = await readBack(workshop, old.invoiceId);
     expect(invoice.writeOffs).toMatchObject([{ amount_minor: 2_000, reason: body.reason }]);
     expect((await readBack(workshop, fresh.invoiceId)).currency).toBe('SEK');
+  });
+
+  it('says in the history why something was written off, though it was written down before the history did', async () => {
+    const { invoiceId } = await sampleInvoice(api.ours);
+    const body = { amount_minor: 1_500, reason: 'Agreed by telephone' };
+    await api.as('owner').call(writeOff, { params: { invoiceId }, body, key: randomUUID() });
+    const said = async () => {
+      const [row] = await api.platform.database.select<{ said: string }>(
+        "SELECT JSON_VALUE(`values`, '$.reason') AS said FROM audit WHERE code = 'history-written-off' AND subject_id = :invoiceId",
+        { invoiceId },
+      );
+      return row.said;
+    };
+    expect(await said()).toBe(body.reason);
+    await api.platform.database.execute(
+      "UPDATE audit SET `values` = JSON_REMOVE(`values`, '$.reason') WHERE subject_id = :invoiceId",
+      { invoiceId },
+    );
+    for (const statement of writtenOffBecause.statements) await api.platform.database.execute(statement);
+    expect(await said()).toBe(body.reason);
   });
 
   it('goes to the accountant as a list and a workbook whose sums are those of the entries, and no text is a formula', async () => {
