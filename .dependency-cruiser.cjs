@@ -103,7 +103,7 @@ const doors = [
     to: {
       path: [
         '^backend/src/(app|main)\\.ts$',
-        '^frontend/src/(main|client|client-start|app/(app|client-app|app-routes|app-config|client-config|client-bootstrap))\\.ts$',
+        '^frontend/src/(main|client|start-client|app/(app|client-app|app-routes|app-config|client-config|client-bootstrap))\\.ts$',
         '^seeders/',
       ],
     },
@@ -150,7 +150,7 @@ const techniques = [
         schemaOrEndpoints,
         '^shared/problems/',
         '^backend/src/platform/(config|http)/',
-        '^frontend/src/((main|client-start)\\.ts$|app/core/|app/.*-form\\.ts$)',
+        '^frontend/src/((main|start-client)\\.ts$|app/core/|app/.*-form\\.ts$)',
         spec,
         testSupport,
       ],

@@ -4,7 +4,7 @@ import { join } from 'node:path';
 /** What a client's first visit comes to in any case: what is asked ahead, the start, the words, and the application with its first two pages. */
 const asked = [
   'frontend/src/client.ts',
-  'frontend/src/client-start.ts',
+  'frontend/src/start-client.ts',
   'shared/words/en.ts',
   'frontend/src/app/client-bootstrap.ts',
 ];

@@ -6,4 +6,4 @@ import { askedAhead } from './app/client-page/asked-ahead';
  */
 askedAhead.begin(location);
 
-import('./client-start').then(({ start }) => start()).catch((error: unknown) => console.error(error));
+import('./start-client').then(({ startClient }) => startClient()).catch((error: unknown) => console.error(error));

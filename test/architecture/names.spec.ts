@@ -14,6 +14,8 @@ const families = new Set([
   'shared/problems/card-entry-schema.ts',
   'shared/units/exact-factors.ts',
   'shared/accounts/workshop-options.ts',
+  'frontend/src/app/client-page/later-pages.ts',
+  'frontend/src/app/client-page/later-parts.ts',
 ]);
 
 /** What an ending promises, and the one side it belongs to. */

@@ -2,8 +2,8 @@ import { loadTranslations } from '@angular/localize';
 import { config } from 'zod/v4/core';
 import { languageFor, languages } from './words/languages';
 
-/** The words come first, as in `main.ts`. */
-export async function start(): Promise<void> {
+/** Starts the pages of clients; the words come first, as in `main.ts`. */
+export async function startClient(): Promise<void> {
   // zod would otherwise try to make functions out of text, which the page's policy forbids.
   config({ jitless: true });
   const language = languageFor(navigator.languages);
