@@ -2,7 +2,7 @@ import { seededGenerator, type Generator32 } from '#shared/estimates/risk/seeded
 import type { LagMatrix } from '#shared/programme/lag-matrix';
 import type { Project, ProjectStarts } from '#shared/programme/project';
 import { projectStarts } from '#shared/programme/project-starts';
-import { placedBefore, serialStarts, type Priorities } from '#shared/programme/serial-starts';
+import { placedBefore, serialStarts, type Priorities, type SerialBase } from '#shared/programme/serial-starts';
 
 /** Orders tried before the exact search begins; fewer for large projects, whose every plan takes long. */
 const orders = ({ activities }: Project): number =>
@@ -20,19 +20,44 @@ const shaken = (priorities: Priorities, share: number, next: Generator32): numbe
   return priorities.map((priority) => priority + (spread * next()) / 2 ** 32);
 };
 
-/** The best of many serial plans: by latest start, by earliest start, by both, and by seeded variations of the best of them; null where none came out. */
-export function improvedStarts(project: Project, matrix: LagMatrix, bound: number): ProjectStarts | null {
-  const next = seededGenerator(project.activities.length);
-  const late = latestStarts(project, matrix);
-  const early = late.map((_, at) => matrix.earliest(at));
-  const rules = [late, early, late.map((latest, at) => latest + early[at])];
-  const serial = { project, matrix, before: placedBefore(project, matrix) };
-  let best: ProjectStarts | null = null;
-  for (let tried = 0; tried < orders(project) && best?.finish !== bound; tried += 1) {
-    const base: Priorities = tried % 2 === 1 && best ? best.starts : late;
-    const starts = serialStarts(serial, rules[tried] ?? shaken(base, 0.1 + 0.05 * (tried % 7), next));
-    const plan = starts && projectStarts(starts, project);
-    if (plan && (!best || plan.finish < best.finish)) best = plan;
+/**
+ * Serial plans of one project, each from a further order: by latest start, by earliest start, by both, and then by seeded variations of the best so far and,
+ * every third time, of the latest starts.
+ */
+export class ImprovedStarts {
+  best: ProjectStarts | null = null;
+  private tried = 0;
+  private readonly draws: Generator32;
+  private readonly late: Priorities;
+  private readonly rules: readonly Priorities[];
+  private readonly serial: SerialBase;
+
+  constructor(
+    private readonly project: Project,
+    matrix: LagMatrix,
+  ) {
+    this.draws = seededGenerator(project.activities.length);
+    this.late = latestStarts(project, matrix);
+    const early = this.late.map((_, at) => matrix.earliest(at));
+    this.rules = [this.late, early, this.late.map((latest, at) => latest + early[at])];
+    this.serial = { project, matrix, before: placedBefore(project, matrix) };
   }
-  return best;
+
+  /** The plan of the next order; null where that leads nowhere. */
+  next(): ProjectStarts | null {
+    const base = this.tried % 3 > 0 && this.best ? this.best.starts : this.late;
+    const order = this.rules[this.tried] ?? shaken(base, 0.05 + 0.07 * (this.tried % 7), this.draws);
+    this.tried += 1;
+    const starts = serialStarts(this.serial, order);
+    const plan = starts && projectStarts(starts, this.project);
+    // One that is as good is taken too, so that variations do not stay round the first.
+    if (plan && (!this.best || plan.finish <= this.best.finish)) this.best = plan;
+    return plan;
+  }
+
+  /** The best of the first orders, fewer where one finishes by the bound; null where none came out. */
+  first(bound: number): ProjectStarts | null {
+    for (let left = orders(this.project); left > 0 && this.best?.finish !== bound; left -= 1) this.next();
+    return this.best;
+  }
 }

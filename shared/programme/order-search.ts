@@ -1,3 +1,4 @@
+import type { ImprovedStarts } from '#shared/programme/improved-starts';
 import { keepsTimetable, usageOf, type Usage } from '#shared/programme/keeps-timetable';
 import type { LagMatrix } from '#shared/programme/lag-matrix';
 import type { Project, ProjectStarts, SearchLimit } from '#shared/programme/project';
@@ -44,22 +45,57 @@ export class OrderSearch {
   }
 
   /**
-   * Searches all that finishes by a moment and tells each better plan. Two ways of choosing conflicts take turns, each time for twice as many nodes, since
-   * each finds and proves what the other does not; whichever comes to its end has proven the best.
+   * Searches all that finishes by a moment, nothing of which finishes before `bound`, and tells each better plan. Two ways of choosing conflicts take turns,
+   * each time for twice as many nodes, since each finds and proves what the other does not; whichever comes to its end has proven the best. Between them
+   * the bound is raised and further serial plans are tried.
    */
-  run(matrix: LagMatrix, finish: number): void {
-    this.by = finish;
-    for (let turn = 0, nodes = firstTurn_nodes; !this.isStopped; turn += 1, nodes *= 2) {
+  run(
+    matrix: LagMatrix,
+    known: { readonly finish: number; readonly bound: number; readonly serial: ImprovedStarts },
+  ): void {
+    [this.by, this.bound] = [known.finish, known.bound];
+    for (let turn = 0, nodes = firstTurn_nodes; !this.isStopped && this.bound <= this.by; turn += 1, nodes *= 2) {
       this.choice = turn % 2 === 0 ? 'first' : 'fewest';
       this.turnEnds = this.nodes + nodes;
       this.branch(matrix.copy());
       if (this.nodes < this.turnEnds) return;
+      this.raiseBound(matrix, nodes);
+      this.tryOrders(known.serial, nodes / 2);
     }
   }
 
+  /** Nothing finishes before this moment. */
+  bound = 0;
   private by = 0;
   private choice: ConflictChoice = 'first';
   private turnEnds = Infinity;
+
+  /**
+   * Tries for so many nodes whether anything finishes by the bound: what has no room to be late is refuted soonest, and the bound rises by one. What is
+   * found there is the best there is (destructive improvement, Klein and Scholl 1999, from memory).
+   */
+  private raiseBound(matrix: LagMatrix, nodes: number): void {
+    this.turnEnds = this.nodes + nodes;
+    while (this.bound <= this.by) {
+      const asked = this.by;
+      this.by = this.bound;
+      this.branch(matrix.copy());
+      if (this.by < this.bound) return;
+      this.by = asked;
+      if (this.nodes >= this.turnEnds || this.isStopped) return;
+      this.bound += 1;
+    }
+  }
+
+  private tryOrders(serial: ImprovedStarts, orders: number): void {
+    for (let left = orders; left > 0 && this.bound <= this.by && !this.mustStop(); left -= 1) {
+      this.nodes += 1;
+      const plan = serial.next();
+      if (!plan || plan.finish > this.by) continue;
+      this.by = plan.finish - 1;
+      this.onBetter(plan);
+    }
+  }
 
   private branch(matrix: LagMatrix): void {
     while (this.nodes < this.turnEnds && !this.mustStop()) {

@@ -44,8 +44,12 @@ function peopleBreaches({ people }: TaskNetwork, positions: Positions): PlanBrea
         position?.crew.people.includes(person) && position.end > position.busyFrom ? [{ position, task }] : [],
       )
       .sort((a, b) => a.position.busyFrom - b.position.busyFrom || a.task - b.task);
+    let latest = -Infinity;
     return busy.flatMap(({ position, task }, at): PlanBreach[] => {
-      const before = busy.slice(0, at).find((one) => one.position.end > position.busyFrom);
+      // Only where somebody is not free yet is it looked for at what.
+      const isHeld = latest > position.busyFrom;
+      latest = Math.max(latest, position.end);
+      const before = isHeld && busy.slice(0, at).find((one) => one.position.end > position.busyFrom);
       return before ? [{ kind: 'people', task, other: before.task, person }] : [];
     });
   });

@@ -95,7 +95,8 @@ export function programme(request: ProgrammeRequest, search: ProgrammeSearch = {
   const until_minutes = Math.max(request.start_minutes, search.backwardFrom_minutes ?? 0);
   const refused = refusal(request, networkOf(request, daysUntil(request, until_minutes)).network);
   if (refused) return refused;
-  const found = firstResult(request, until_minutes);
+  // Round a plan there is already, one that shows whether there is any is enough.
+  const found = firstResult(request, { until_minutes, result: search.previous ? 'any' : 'best' });
   const { ready, result, missed } = found;
   const first = result.positions && networkPlan(result.positions);
   const clashes = first ? pinClashes(request, ready.network, first.positions) : [];

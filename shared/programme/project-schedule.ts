@@ -1,5 +1,5 @@
 import { contradictingLags } from '#shared/programme/contradicting-lags';
-import { improvedStarts } from '#shared/programme/improved-starts';
+import { ImprovedStarts } from '#shared/programme/improved-starts';
 import { LagMatrix } from '#shared/programme/lag-matrix';
 import { OrderSearch } from '#shared/programme/order-search';
 import type { Project, ProjectSchedule, ProjectSearch, ProjectStarts } from '#shared/programme/project';
@@ -56,13 +56,13 @@ const isTooMuch = ({ activities, capacities }: Project): boolean =>
 /** The better of what is known already and what the constructive methods find. */
 function firstPlan(
   project: Project,
-  matrix: LagMatrix,
+  serial: ImprovedStarts,
   known: { incumbent?: readonly number[]; bound: number },
 ): ProjectStarts | null {
   const { incumbent, bound } = known;
   const kept = incumbent && isProjectPlan(incumbent, project) ? projectStarts(incumbent, project) : null;
   if (kept?.finish === bound) return kept;
-  const made = improvedStarts(project, matrix, bound);
+  const made = serial.first(bound);
   return kept && made ? (made.finish < kept.finish ? made : kept) : (kept ?? made);
 }
 
@@ -87,10 +87,11 @@ export function projectSchedule(
   const far = farEnough(project, matrix);
   if (!search.settle(matrix.copy(), far)) return impossible([]);
   const bound = provenBound(search, matrix, far);
-  const first = firstPlan(project, matrix, { incumbent, bound });
+  const serial = new ImprovedStarts(project, matrix);
+  const first = firstPlan(project, serial, { incumbent, bound });
   if (first) take(first);
-  if (first?.finish !== bound) search.run(matrix, first ? first.finish - 1 : far);
-  return concluded(found, search, bound);
+  if (first?.finish !== bound) search.run(matrix, { finish: first ? first.finish - 1 : far, bound, serial });
+  return concluded(found, search, Math.max(bound, search.bound));
 }
 
 function checkProject({ activities, lags, capacities }: Project): void {

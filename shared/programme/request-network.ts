@@ -76,7 +76,20 @@ export interface FirstResult {
   readonly endless: NetworkArc | null;
 }
 
-function firstOver(ready: RequestNetwork): FirstResult {
+/** The best of the first orders, or the first of them that comes to a plan, where all that is asked is whether there is one. */
+function orderedResult(ready: RequestNetwork, asked: 'best' | 'any'): SerialResult {
+  const finish = ({ positions }: SerialResult): number => (positions ? networkPlan(positions).finish : Infinity);
+  let best: SerialResult | null = null;
+  for (const order of firstOrders(ready)) {
+    const result = serialResult(ready, order);
+    if (!best || finish(result) < finish(best)) best = result;
+    if (asked === 'any' && best.positions) break;
+  }
+  if (!best) throw new RangeError('there is always an order to begin with');
+  return best;
+}
+
+function firstOver(ready: RequestNetwork, asked: 'best' | 'any'): FirstResult {
   if (ready.earliest.failed) {
     const { failed } = ready.earliest;
     return {
@@ -85,16 +98,19 @@ function firstOver(ready: RequestNetwork): FirstResult {
       result: { positions: null, failure: { task: failed.to, arc: failed, isHeld: false } },
     };
   }
-  const results = firstOrders(ready).map((order) => serialResult(ready, order));
-  const finish = ({ positions }: SerialResult): number => (positions ? networkPlan(positions).finish : Infinity);
-  const result = results.reduce((best, one) => (finish(one) < finish(best) ? one : best));
-  return { ready, result, endless: null };
+  return { ready, result: orderedResult(ready, asked), endless: null };
+}
+
+/** How far a calendar is needed at the least, and whether any plan will do. */
+export interface FirstAsked {
+  readonly until_minutes: number;
+  readonly result: 'best' | 'any';
 }
 
 /** A network over as many days of the calendar as it takes to plan it: those it has, and twice as many each time the hours run out. */
-function firstOverDays(request: ProgrammeRequest, until_minutes: number, missed: ReadonlySet<string>): FirstResult {
-  for (let days = daysUntil(request, until_minutes); ; days *= 2) {
-    const found = firstOver(over(request, networkOf(request, days, missed).network));
+function firstOverDays(request: ProgrammeRequest, asked: FirstAsked, missed: ReadonlySet<string>): FirstResult {
+  for (let days = daysUntil(request, asked.until_minutes); ; days *= 2) {
+    const found = firstOver(over(request, networkOf(request, days, missed).network), asked.result);
     const { failure } = found.result;
     const isOutOfHours = failure !== null && (failure.arc === null || found.ready.earliest.ends.includes(Infinity));
     if (!isOutOfHours || days * 2 > mostDays) return found;
@@ -104,11 +120,11 @@ function firstOverDays(request: ProgrammeRequest, until_minutes: number, missed:
 /** A first plan of a request; windows of what has happened that can be kept no more are left out and named, by the ids of their lags. */
 export function firstResult(
   request: ProgrammeRequest,
-  until_minutes: number,
+  asked: FirstAsked,
 ): FirstResult & { readonly missed: ReadonlySet<string> } {
   const missed = new Set<string>();
   for (;;) {
-    const found = firstOverDays(request, until_minutes, missed);
+    const found = firstOverDays(request, asked, missed);
     const arc = found.result.failure?.arc;
     if (arc?.side !== 'most' || !request.tasks[arc.to].happened || missed.has(arc.sourceId))
       return { ...found, missed };

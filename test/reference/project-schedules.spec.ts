@@ -14,6 +14,7 @@ import {
   taskForSpecs,
 } from '#shared/programme/request-for-specs';
 import { exhaustiveFinish } from './exhaustive-starts';
+import { middlingProject } from './middling-project';
 
 /**
  * Random networks (seeds given, so always the same) against an independent solver: exhaustive search over all starts. The published instances UBO10 and UBO20 of
@@ -65,24 +66,9 @@ describe('Small random networks', () => {
   });
 });
 
-const middling = (activities: number, seed: number): Project =>
-  projectForSpecs(
-    {
-      activities,
-      resources: 5,
-      longest: 10,
-      order: [0.1, 0.2, 0.35][seed % 3],
-      cycles: [0.3, 0.15, 0.5][seed % 3],
-      tightness: [0.3, 0.6, 0.9][seed % 3],
-      factor: [0.5, 0.75, 1][(seed >> 1) % 3],
-      strength: [0, 0.1, 0.25, 0.5][seed % 4],
-    },
-    seed,
-  );
-
 describe('Networks of ten activities and five resources', () => {
   it('are each solved to the proof, the starts keeping every rule', () => {
-    const projects = Array.from({ length: 40 }, (_, seed) => middling(10, seed));
+    const projects = Array.from({ length: 40 }, (_, seed) => middlingProject(10, seed));
     const schedules = projects.map((project) => projectSchedule(project, { limit: { nodes: 200_000 } }));
     expect(schedules.filter(({ status }) => status !== 'optimal' && status !== 'infeasible')).toEqual([]);
     expect(schedules.map(({ starts }, at) => starts === null || isProjectPlan(starts, projects[at]))).not.toContain(
