@@ -51,7 +51,13 @@ describe('the schema of build-ups', () => {
       'entry-not-whole',
     ],
     ['a spread out of order', ['spread', 'low'], 2, 'spread.low', 'triple-low-above'],
-    ['a price with a comma', ['materials', 0, 'pricePerUnit'], '24,00', 'materials.0.pricePerUnit', 'entry-not-decimal'],
+    [
+      'a price with a comma',
+      ['materials', 0, 'pricePerUnit'],
+      '24,00',
+      'materials.0.pricePerUnit',
+      'entry-not-decimal',
+    ],
     [
       'a lag to a step before',
       ['buildUps', 0, 'steps', 7, 'drying', 'lags', 0, 'toStepId'],

@@ -10,9 +10,9 @@ function finishOf(buildUp: BuildUp): LeafFinish {
 }
 
 /** What leaf has to know of a build-up it is laid in; null where no leaf is laid. A build-up with a seal step is sealed: an optional one is done where leaf needs it. */
-export function laidGroundOf(buildUp: BuildUp, isOutdoors: boolean): LaidGround | null {
+export function laidGroundOf(buildUp: BuildUp): LaidGround | null {
   const { system, steps } = buildUp;
   if (system !== 'water' && system !== 'oil' && system !== 'water-borne-size') return null;
   if (!steps.some((step) => step.kind === 'lay')) return null;
-  return { system, finish: finishOf(buildUp), isSealed: steps.some((step) => step.kind === 'seal'), isOutdoors };
+  return { system, finish: finishOf(buildUp), isSealed: steps.some((step) => step.kind === 'seal') };
 }

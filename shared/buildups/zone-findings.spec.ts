@@ -142,11 +142,11 @@ describe('what leaf is told of a build-up', () => {
     ['oil-quick', 'oil', 'oil', true],
     ['water-borne-size', 'water-borne-size', 'oil', true],
   ] as const)('%s', (id, system, finish, isSealed) => {
-    expect(laidGroundOf(named(id), false)).toEqual({ system, finish, isSealed, isOutdoors: false });
+    expect(laidGroundOf(named(id))).toEqual({ system, finish, isSealed });
   });
 
   it('nothing where no leaf is laid', () => {
-    expect(laidGroundOf(named('paint'), false)).toBeNull();
-    expect(laidGroundOf(named('bare'), false)).toBeNull();
+    expect(laidGroundOf(named('paint'))).toBeNull();
+    expect(laidGroundOf(named('bare'))).toBeNull();
   });
 });

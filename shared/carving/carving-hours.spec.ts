@@ -143,6 +143,11 @@ describe('carvingHours', () => {
     expect(kind(result, 'stage')).toBeCloseTo(1.8, 12);
   });
 
+  it('says of a clay model that it is one, not at which size', () => {
+    const [first] = worked([carved(use('clay-model', pieces(1)))]).uses[0]?.reasons ?? [];
+    expect(first).toMatchObject({ code: 'carving-each', values: { ornament: 'Clay model' }, figure: 6 });
+  });
+
   it('adds sharpening once, to carving and not to patterns, models or recutting', () => {
     const result = worked(
       [

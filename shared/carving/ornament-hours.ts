@@ -11,8 +11,13 @@ import type { Finding } from '#shared/words/finding';
 import type { Reason } from '#shared/words/reason';
 
 const firstUnit = (named: Ornament | CarvingItem, list: 'ornaments' | 'items'): Reason => ({
-  code: `carving-first-${named.way}`,
-  values: { ornament: named.name, reference_mm: named.reference_mm ?? 100 },
+  ...(named.way === 'piece' && named.reference_mm === null
+    ? { code: 'carving-each', values: { ornament: named.name } }
+    : // A run or an area without a reference goes by the 100 mm or the square decimetre.
+      {
+        code: `carving-first-${named.way}`,
+        values: { ornament: named.name, reference_mm: named.reference_mm ?? 100 },
+      }),
   figure: named.hours.likely,
   unit: 'hours',
   house: `carving.${list}.${named.id}.hours`,

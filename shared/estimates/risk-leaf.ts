@@ -26,10 +26,18 @@ interface Priced {
   readonly digits: number;
 }
 
-const lossKeys = ({ way, ground }: ZoneLeaf) => ({
-  breakageKey: `breakage/${way}`,
-  faultingKey: `faulting/${way}`,
-  secondLayingKey: `second/${ground.finish}/${way}`,
+// Zones burnished to different shares are laid again to different extents.
+const secondKey = ({ way, losses }: ZoneLeaf): string =>
+  [
+    'second',
+    ...losses.secondLayings.flatMap(({ finish, share }) => (share === 1 ? [finish] : [finish, share])),
+    way,
+  ].join('/');
+
+const lossKeys = (leaf: ZoneLeaf) => ({
+  breakageKey: `breakage/${leaf.way}`,
+  faultingKey: `faulting/${leaf.way}`,
+  secondLayingKey: secondKey(leaf),
 });
 
 const fraction = (percent: Triple): Triple => mapTriple(percent, (figure) => figure / 100);

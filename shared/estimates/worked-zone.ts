@@ -1,4 +1,5 @@
 import type { BuildUp } from '#shared/buildups/buildup';
+import { burnishedShare } from '#shared/buildups/burnished-share';
 import { laidGroundOf } from '#shared/buildups/laid-ground-of';
 import { layingCounts } from '#shared/buildups/laying-counts';
 import { minutesPerLaid } from '#shared/buildups/minutes-per-laid';
@@ -78,7 +79,7 @@ function leafOf(
   at: ZoneAt,
   known: { buildUp: BuildUp; facts: ZoneFacts; product: LeafProduct },
 ): ZoneLeaf | null {
-  const ground = laidGroundOf(known.buildUp, known.facts.isOutdoorsOrWet);
+  const ground = laidGroundOf(known.buildUp);
   if (!ground) return null;
   const { laying, take } = zone.zone;
   const input = {
@@ -93,6 +94,8 @@ function leafOf(
     members: at.measured.member.count,
     relief: zone.zone.relief,
     reliefFactor: zone.area.reliefFactor,
+    finish: zone.finish,
+    burnishedShare: burnishedShare(known.facts, at.card.buildUps),
     way: laying.way === 'proposed' ? null : laying.way,
     strips: laying.strips,
     cuts: laying.cuts,
@@ -109,7 +112,7 @@ function layingOf(leaf: ZoneLeaf, product: LeafProduct): ZoneFacts['laying'] {
 
 function missingFindings(zone: MeasuredZone, at: ZoneAt, buildUp: BuildUp | undefined): Finding[] {
   const about = zone.zone.id;
-  if (!buildUp || !laidGroundOf(buildUp, false)) return [];
+  if (!buildUp || !laidGroundOf(buildUp)) return [];
   const isKnown = at.card.leaf.products.some((product) => product.id === zone.zone.leafId);
   return isKnown ? [] : [{ kind: 'missing', code: 'zone-leaf-missing', values: { zone: zone.zone.name }, about }];
 }

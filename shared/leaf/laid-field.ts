@@ -25,14 +25,20 @@ function partsField({ surface }: FieldInput, keys: readonly string[]): LaidField
   return { area_mm2, moulding: { girth_mm, run_mm, closedRun: surface.closedRun }, courses: [] };
 }
 
+const alongField = ({ length_mm, height_mm, closed }: Course): MouldingRun => ({
+  girth_mm: closed ? height_mm : Math.min(length_mm, height_mm),
+  run_mm: closed ? length_mm : Math.max(length_mm, height_mm),
+  closedRun: closed,
+});
+
 function wholeMoulding({ surface }: FieldInput): MouldingRun | null {
   const { area_mm2, girth_mm, run_mm, closedRun, courses } = surface;
+  const [only, ...others] = courses;
+  // A single narrow field is a moulding without a profile; it is laid along its longer side, or round.
+  if (only && others.length === 0 && area_mm2 <= only.length_mm * only.height_mm * (1 + 1e-9)) return alongField(only);
   if (girth_mm !== undefined && run_mm !== undefined)
     return { girth_mm, run_mm: runFor(area_mm2, girth_mm, run_mm), closedRun };
-  const [only, ...others] = courses;
-  // A single narrow field is a moulding without a profile.
-  if (!only || others.length > 0 || area_mm2 > only.length_mm * only.height_mm * (1 + 1e-9)) return null;
-  return { girth_mm: only.height_mm, run_mm: only.length_mm, closedRun: only.closed };
+  return null;
 }
 
 /** The field a zone is laid on: a share is counted on the whole member and split afterwards, parts of the girth by themselves. */

@@ -5,6 +5,4 @@ export interface LaidGround {
   readonly system: 'water' | 'oil' | 'water-borne-size';
   readonly finish: LeafFinish;
   readonly isSealed: boolean;
-  /** Outdoors or in the wet. */
-  readonly isOutdoors: boolean;
 }

@@ -8,6 +8,10 @@ import type { Reason } from '#shared/words/reason';
 const ofField = (field: SheetField, step_mm: number): Reason[] => {
   const { length_mm, height_mm, leavesAlong, fullCourses, strip_mm, stripsPerLeaf, direction } = field;
   const sizes = direction === 'along' ? { length_mm, height_mm } : { length_mm: height_mm, height_mm: length_mm };
+  const strip = { strip_mm, strips: stripsPerLeaf, along: leavesAlong };
+  const stripLeaves = leavesAlong / stripsPerLeaf;
+  if (fullCourses === 0 && strip_mm > 0)
+    return [{ code: 'leaf-narrow-strip', values: { ...sizes, ...strip }, figure: stripLeaves, unit: 'number' }];
   const courses: Reason = {
     code: 'leaf-courses',
     values: { ...sizes, courses: fullCourses, along: leavesAlong, step_mm },
@@ -15,8 +19,7 @@ const ofField = (field: SheetField, step_mm: number): Reason[] => {
     unit: 'number',
   };
   if (strip_mm === 0) return [courses];
-  const values = { strip_mm, strips: stripsPerLeaf, along: leavesAlong };
-  return [courses, { code: 'leaf-last-strip', values, figure: leavesAlong / stripsPerLeaf, unit: 'number' }];
+  return [courses, { code: 'leaf-last-strip', values: strip, figure: stripLeaves, unit: 'number' }];
 };
 
 function ofSheets({ fields, rest_mm2, step_mm }: SheetsLaying): Reason[] {

@@ -66,6 +66,13 @@ describe('laysLaying', () => {
     expect(laysLaying(moulding(25, 40), step, usual).small).toBeNull();
   });
 
+  it('a small piece that has none like it shares its leaf with nothing: one strip of three', () => {
+    expect(laysLaying(moulding(25, 30), step, { ...usual, isAlone: true })).toMatchObject({
+      small: null,
+      leaves: 1 / 3,
+    });
+  });
+
   it('nothing takes nothing', () => {
     expect(laysLaying(moulding(0, 900), step, usual)).toMatchObject({ leaves: 0, pieces: 0 });
     expect(laysLaying(moulding(40, 0), step, usual)).toMatchObject({ leaves: 0, pieces: 0 });

@@ -18,6 +18,8 @@ export interface LaysChoice {
   /** What a leaf and the laying of a piece cost, in one currency. */
   readonly leafCost: number;
   readonly pieceCost: number;
+  /** There is no other piece like it, so that a small one shares its leaf with nothing. */
+  readonly isAlone?: boolean;
 }
 
 /** A leaf cut into so many strips, and what that takes on one member. */
@@ -89,7 +91,7 @@ export function laysLaying(run: MouldingRun, step: LeafStep, choice: LaysChoice)
     return { ...counted, cost: settled(counted.leaves * choice.leafCost + counted.pieces * choice.pieceCost) };
   });
   const chosen = cheapest(options, choice);
-  const small = choice.strips === null ? smallPieces(run, step) : null;
+  const small = choice.strips === null && !choice.isAlone ? smallPieces(run, step) : null;
   const { leaves, pieces } = small ? { leaves: 1 / (small.across * small.along), pieces: 1 } : chosen;
   const { girth_mm, run_mm } = run;
   const { side_mm, lap_mm } = step;

@@ -4,9 +4,9 @@ import { startLeaf } from '#shared/leaf/start-leaf';
 import { zoneLeaf } from '#shared/leaf/zone-leaf';
 import type { Relief } from '#shared/measure/relief';
 
-const water: LaidGround = { system: 'water', finish: 'water-burnished', isSealed: false, isOutdoors: false };
-const oil: LaidGround = { system: 'oil', finish: 'oil', isSealed: false, isOutdoors: false };
-const size: LaidGround = { system: 'water-borne-size', finish: 'oil', isSealed: false, isOutdoors: false };
+const water: LaidGround = { system: 'water', finish: 'water-burnished', isSealed: false };
+const oil: LaidGround = { system: 'oil', finish: 'oil', isSealed: false };
+const size: LaidGround = { system: 'water-borne-size', finish: 'oil', isSealed: false };
 
 const ribbon = {
   ...startLeaf.products[0],
@@ -40,6 +40,8 @@ function found(
     openings_mm2: 0,
     members: 1,
     reliefFactor: 1,
+    finish,
+    burnishedShare: 1,
     way: null,
     strips: null,
     cuts: null,
@@ -67,12 +69,6 @@ describe('leafFindings', () => {
       ['refuse leaf-base-metal-on-water'],
     ],
     ['nor is aluminium', found('aluminium-loose', water), ['refuse leaf-base-metal-on-water']],
-    [
-      'water gilding does not stand outdoors',
-      found('gold-23-5-loose', { ...water, isOutdoors: true }),
-      ['refuse leaf-water-outdoors'],
-    ],
-    ['oil gilding does', found('gold-23-5-loose', { ...oil, isOutdoors: true }), []],
     ['transfer leaf is not laid by water', found('gold-23-5-transfer', water), ['refuse leaf-transfer-on-water']],
     ['transfer leaf on flat oil size', found('gold-23-5-transfer', oil), []],
     ['transfer leaf on carving is slow', found('gold-23-5-transfer', oil, 'high'), ['warn leaf-transfer-on-carving']],

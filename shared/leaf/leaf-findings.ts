@@ -28,9 +28,10 @@ export const needsSeal = (product: LeafProduct): boolean =>
 const isBase = ({ metal }: LeafProduct): boolean => metal === 'composition' || metal === 'aluminium';
 
 const isCarved = ({ input, way }: Laid): boolean =>
-  input.relief !== 'flat' || input.surface.finish === 'carved' || way === 'patches';
+  input.relief !== 'flat' || input.finish === 'carved' || way === 'patches';
 
-const isFlat = (laid: Laid): boolean => !isCarved(laid) && laid.input.surface.finish === 'plain';
+const isFlat = (laid: Laid): boolean =>
+  !isCarved(laid) && laid.input.surface.finish === 'plain' && laid.input.finish === 'plain';
 
 // Common practice of the trade where no source is named.
 const rules: readonly Rule[] = [
@@ -43,11 +44,6 @@ const rules: readonly Rule[] = [
     kind: 'warn',
     code: 'leaf-unsealed',
     applies: ({ product, ground }) => product.metal !== 'silver' && needsSeal(product) && !ground.isSealed,
-  },
-  {
-    kind: 'refuse',
-    code: 'leaf-water-outdoors',
-    applies: ({ ground }) => ground.system === 'water' && ground.isOutdoors,
   },
   {
     kind: 'refuse',

@@ -6,7 +6,7 @@ import type { ZoneLeaf } from '#shared/leaf/laying';
 const zone = (productId: string, leaves: number, trueArea_mm2: number): ZoneLeaf => ({
   zoneId: `${productId} ${leaves}`,
   productId,
-  ground: { system: 'water', finish: 'water-burnished', isSealed: false, isOutdoors: false },
+  ground: { system: 'water', finish: 'water-burnished', isSealed: false },
   way: 'sheets',
   laying: null,
   planArea_mm2: trueArea_mm2,
@@ -16,6 +16,7 @@ const zone = (productId: string, leaves: number, trueArea_mm2: number): ZoneLeaf
     breakage_percent: { low: 0, likely: 0, high: 0 },
     faulting_percent: { low: 0, likely: 0, high: 0 },
     second_percent: { low: 0, likely: 0, high: 0 },
+    secondLayings: [],
   },
   grossLeaves: { low: leaves * 0.9, likely: leaves, high: leaves * 1.2 },
   grossLeaves_p10: leaves * 0.95,

@@ -91,7 +91,7 @@ export const startLeaf: LeafCard = {
   },
   secondLaying_percent: {
     'water-burnished': byWay(triple(0, 0, 5), triple(0, 5, 15), triple(5, 10, 25)),
-    // Laid as for burnishing all over; the matte rest shows its faults less than a wholly matte piece does.
+    // Of the burnished part; the rest of the zone is laid again as matte gilding is.
     'water-burnished-and-matte': byWay(triple(0, 0, 5), triple(0, 5, 15), triple(5, 10, 25)),
     'water-matte': byWay(triple(80, 100, 100), triple(80, 100, 100), triple(80, 100, 100)),
     oil: byWay(triple(0, 0, 10), triple(0, 0, 10), triple(0, 0, 10)),

@@ -4,6 +4,7 @@ import type { LayingWay, LeafCard } from '#shared/leaf/leaf-card';
 import type { LeafProduct } from '#shared/leaf/leaf-product';
 import { hasRoomForLaps, type LeafStep } from '#shared/leaf/leaf-step';
 import { patchesLaying } from '#shared/leaf/patches-laying';
+import { proposedWay } from '#shared/leaf/proposed-way';
 import { ribbonLaying } from '#shared/leaf/ribbon-laying';
 import { sheetsLaying } from '#shared/leaf/sheets-laying';
 import type { ZoneLeafInput } from '#shared/leaf/zone-leaf-input';
@@ -41,7 +42,7 @@ const tell = (
   about: input.zoneId,
 });
 
-const isCarved = ({ relief, surface }: ZoneLeafInput): boolean => relief !== 'flat' || surface.finish === 'carved';
+const isCarved = ({ relief, finish }: ZoneLeafInput): boolean => relief !== 'flat' || finish === 'carved';
 
 const laid = (way: LayingWay, laying: Laying, findings: readonly Finding[] = []): ZoneLaying => ({
   way,
@@ -75,6 +76,7 @@ function asLays(job: Job): ZoneLaying {
     fewestStrips: isCarved(input) ? 2 : 1,
     leafCost: Number(product.price) / product.leavesPerBooklet,
     pieceCost: input.pieceCost,
+    isAlone: input.members === 1,
   });
   const values = { strips: strips ?? 0, lap_mm: step.lap_mm };
   return laid('lays', laying, isTooNarrow ? [tell(job, 'refuse', { code: 'leaf-strips-too-narrow', values })] : []);
@@ -93,9 +95,9 @@ function asRibbon(job: Job, roll_mm: number): ZoneLaying {
 
 const ways = { sheets: asSheets, lays: asLays, patches: asPatches } as const;
 
-/** Lays one member of a zone with a product in the way that was chosen, or that its shape proposes; mm, mm² and leaves not rounded. */
+/** Lays one member of a zone with a product in the way that was chosen, else in the proposed one; mm, mm² and leaves not rounded. */
 export function zoneLaying(input: ZoneLeafInput, product: LeafProduct, card: LeafCard): ZoneLaying {
-  const way = product.form === 'ribbon' ? 'sheets' : (input.way ?? input.surface.laying);
+  const way = product.form === 'ribbon' ? 'sheets' : (input.way ?? proposedWay(input, product.side_mm));
   const job: Job = { input, product, card, field: laidField(input) };
   const step = stepOf(job, way);
   if (!hasRoomForLaps(step, 1)) {

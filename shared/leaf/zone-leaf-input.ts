@@ -1,6 +1,6 @@
 import type { LaidGround } from '#shared/leaf/laid-ground';
 import type { LayingWay } from '#shared/leaf/leaf-card';
-import type { Relief } from '#shared/measure/relief';
+import type { Relief, SurfaceFinish } from '#shared/measure/relief';
 import type { Surface } from '#shared/measure/surface';
 
 /** One zone to be laid with leaf: its member's surface, what it takes of it, and how. */
@@ -18,9 +18,13 @@ export interface ZoneLeafInput {
   readonly openings_mm2: number;
   readonly members: number;
   readonly relief: Relief;
+  /** How worked the surface of the zone is. */
+  readonly finish: SurfaceFinish;
+  /** Share (0…1) that is burnished where a zone is both burnished and matte. */
+  readonly burnishedShare: number;
   /** True surface ÷ plan surface, as `measure` gives it for this relief and surface. */
   readonly reliefFactor: number;
-  /** Null follows the shape, the cheapest strips and the card's cuts. */
+  /** Null follows shape, relief and width, the cheapest strips and the card's cuts. */
   readonly way: LayingWay | null;
   readonly strips: number | null;
   readonly cuts: number | null;

@@ -1,4 +1,5 @@
 import { layingReasons } from '#shared/leaf/laying-reasons';
+import type { LeafFinish } from '#shared/leaf/leaf-card';
 import type { ZoneLeafInput } from '#shared/leaf/zone-leaf-input';
 import type { ZoneLeaf } from '#shared/leaf/laying';
 import type { Reason } from '#shared/words/reason';
@@ -21,16 +22,28 @@ function splitReasons({ openings_mm2, surface, share, members, relief, reliefFac
   ];
 }
 
-function lossReasons({ way, ground, losses }: Worked): Reason[] {
+const isMatte = (finish: LeafFinish): boolean => finish === 'water-matte';
+
+function secondReasons({ way, losses }: Worked): Reason[] {
+  const houseOf = (finish: LeafFinish) => `leaf.secondLaying_percent.${finish}.${way}`;
+  const [only, ...others] = losses.secondLayings;
+  const all: Reason = { code: 'leaf-second-laying', values: {}, figure: losses.second_percent.likely, unit: 'percent' };
+  if (others.length === 0) return [{ ...all, house: houseOf(only.finish) }];
+  const parts = losses.secondLayings.map(({ finish, share, percent }): Reason => ({
+    code: isMatte(finish) ? 'leaf-second-matte' : 'leaf-second-burnished',
+    values: { share_percent: share * 100 },
+    figure: percent.likely,
+    unit: 'percent',
+    house: houseOf(finish),
+  }));
+  return [...parts, { ...all, code: 'leaf-second-blended' }];
+}
+
+function lossReasons(worked: Worked): Reason[] {
+  const { way, losses } = worked;
   const of = `leaf.losses.${way}`;
   return [
-    {
-      code: 'leaf-second-laying',
-      values: {},
-      figure: losses.second_percent.likely,
-      unit: 'percent',
-      house: `leaf.secondLaying_percent.${ground.finish}.${way}`,
-    },
+    ...secondReasons(worked),
     {
       code: 'leaf-faulting',
       values: {},

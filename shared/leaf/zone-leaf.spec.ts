@@ -39,7 +39,7 @@ const field: Surface = {
 const usual: ZoneLeafInput = {
   zoneId: 'zone',
   productId: 'gold-23-5-loose',
-  ground: { system: 'water', finish: 'water-burnished', isSealed: false, isOutdoors: false },
+  ground: { system: 'water', finish: 'water-burnished', isSealed: false },
   surface: edge,
   partKeys: ['ovolo'],
   share: 1,
@@ -47,6 +47,8 @@ const usual: ZoneLeafInput = {
   members: 1,
   relief: 'middle',
   reliefFactor: 1.35,
+  finish: 'carved',
+  burnishedShare: 0.4,
   way: null,
   strips: null,
   cuts: null,
@@ -108,6 +110,55 @@ describe('zoneLeaf', () => {
     expect(fillet.reasons.find(({ code }) => code === 'leaf-strips')?.values).toEqual({ strips: 6 });
   });
 
+  it('lays the burnished and the matte part of a zone again, each to its own extent', () => {
+    const parted = laid({
+      way: 'patches',
+      ground: { ...usual.ground, finish: 'water-burnished-and-matte' },
+      burnishedShare: 0.4,
+    });
+    // 40 % at 10 and 60 % at 100: 4 + 60.
+    expect(parted.losses.second_percent.likely).toBeCloseTo(64, 9);
+    expect(parted.losses.second_percent.low).toBeCloseTo(0.4 * 5 + 0.6 * 80, 9);
+    expect(parted.losses.second_percent.high).toBeCloseTo(0.4 * 25 + 0.6 * 100, 9);
+    const word = say(en, { locale: 'en-GB', write: (unit, figure) => `${Math.round(figure * 10) / 10} ${unit}` });
+    const told = parted.reasons
+      .filter(({ code }) => code.startsWith('leaf-second'))
+      .map(({ code, values, figure, house }) => [word(code, values), Math.round(Number(figure)), house]);
+    expect(told).toEqual([
+      ['second laying of the burnished 40 percent', 10, 'leaf.secondLaying_percent.water-burnished-and-matte.patches'],
+      ['second laying of the matte 60 percent', 100, 'leaf.secondLaying_percent.water-matte.patches'],
+      ['second laying of the whole, each by its share', 64, undefined],
+    ]);
+  });
+
+  it('takes five leaves for 40 plaques of 30 by 20 mm: four by two from a leaf', () => {
+    const plaque = { ...field, area_mm2: 600, courses: [{ length_mm: 30, height_mm: 20, closed: false }] };
+    const plain = { surface: plaque, partKeys: null, relief: 'flat', reliefFactor: 1, finish: 'plain' } as const;
+    expect(laid({ ...plain, members: 40 })).toMatchObject({ way: 'lays', netLeaves: 5 });
+    // One by itself is a strip of a quarter leaf.
+    expect(laid({ ...plain, members: 1 })).toMatchObject({ way: 'lays', netLeaves: 0.25 });
+  });
+
+  it('says of a field less than a leaf wide that it is one strip', () => {
+    const strip = { ...field, area_mm2: 780 * 30, courses: [{ length_mm: 780, height_mm: 30, closed: false }] };
+    const plain = { surface: strip, partKeys: null, relief: 'flat', reliefFactor: 1, finish: 'plain' } as const;
+    const [told] = laid({ ...plain, way: 'sheets' }).reasons;
+    // Ten leaves along, two strips of 30 mm from a leaf of 80.
+    expect(told).toMatchObject({
+      code: 'leaf-narrow-strip',
+      values: { strip_mm: 30, along: 10, strips: 2, length_mm: 780, height_mm: 30 },
+      figure: 5,
+    });
+  });
+
+  it('patches a carved field, and keeps the way somebody chose', () => {
+    const carved = { surface: field, partKeys: null, relief: 'high', reliefFactor: 1.7 } as const;
+    // 782 × 392 = 306,544 mm² in squares of 80 − 2 × 3.2 = 73.6 mm, 5416.96 mm²: 56.59, × 1.7.
+    expect(laid(carved).way).toBe('patches');
+    expect(laid(carved).netLeaves).toBeCloseTo(96.202, 2);
+    expect(laid({ ...carved, way: 'sheets' })).toMatchObject({ way: 'sheets', netLeaves: 50 * 1.7 });
+  });
+
   it('counts a share on the whole moulding and splits it', () => {
     const plain = { partKeys: null, relief: 'flat', reliefFactor: 1, strips: 3 } as const;
     const whole = laid(plain).netLeaves;
@@ -127,6 +178,7 @@ describe('zoneLeaf', () => {
       partKeys: null,
       openings_mm2: (782 * 392) / 2,
       relief: 'flat',
+      finish: 'plain',
       reliefFactor: 1,
     });
     expect(half.netLeaves).toBeCloseTo(25, 9);

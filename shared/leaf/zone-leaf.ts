@@ -2,6 +2,7 @@ import { keptShare, laidField } from '#shared/leaf/laid-field';
 import { leafFindings } from '#shared/leaf/leaf-findings';
 import type { LeafCard } from '#shared/leaf/leaf-card';
 import type { LeafProduct } from '#shared/leaf/leaf-product';
+import { proposedWay } from '#shared/leaf/proposed-way';
 import type { ZoneLeafInput } from '#shared/leaf/zone-leaf-input';
 import { zoneLeafReasons } from '#shared/leaf/zone-leaf-reasons';
 import type { Laying, ZoneLeaf } from '#shared/leaf/laying';
@@ -24,7 +25,7 @@ function partFindings({ zoneId, partKeys, surface }: ZoneLeafInput): Finding[] {
 }
 
 function noLeaf(input: ZoneLeafInput, card: LeafCard): ZoneLeaf {
-  const way = input.way ?? input.surface.laying;
+  const way = input.way ?? proposedWay(input, 0);
   const none = { low: 0, likely: 0, high: 0 };
   return {
     zoneId: input.zoneId,
@@ -35,7 +36,7 @@ function noLeaf(input: ZoneLeafInput, card: LeafCard): ZoneLeaf {
     planArea_mm2: 0,
     trueArea_mm2: 0,
     netLeaves: 0,
-    losses: zoneLosses(way, input.ground.finish, card),
+    losses: zoneLosses(way, input, card),
     grossLeaves: none,
     grossLeaves_p10: 0,
     grossLeaves_p90: 0,
@@ -50,7 +51,7 @@ function counted(input: ZoneLeafInput, product: LeafProduct, card: LeafCard): Zo
   const kept = keptShare(input) * input.members;
   const planArea_mm2 = laidField(input).area_mm2 * kept;
   const netLeaves = (laying?.leaves ?? 0) * kept * input.reliefFactor;
-  const losses = zoneLosses(way, input.ground.finish, card);
+  const losses = zoneLosses(way, input, card);
   const grossLeaves = grossTriple(netLeaves, losses);
   const each = handledPerLeaf(laying, product);
   const worked = {

@@ -1,7 +1,15 @@
 import { polygonArea } from '#shared/geometry/polygon';
-import type { FlatShape, RectangleShape, RingShape } from '#shared/measure/flat-shape';
+import type {
+  CircleShape,
+  EllipseShape,
+  FlatShape,
+  PolygonShape,
+  RectangleShape,
+  RingShape,
+  TriangleShape,
+} from '#shared/measure/flat-shape';
 import { flutedSurface } from '#shared/measure/fluted-surface';
-import { girthByRun, madeSurface } from '#shared/measure/made-surface';
+import { because, girthByRun, steppedSurface } from '#shared/measure/made-surface';
 import type { Surface } from '#shared/measure/surface';
 
 const rectangle = ({ length_mm, height_mm, fluting }: RectangleShape): Surface =>
@@ -22,20 +30,53 @@ const ring = ({ outerDiameter_mm, innerDiameter_mm }: RingShape): Surface =>
     closedRun: true,
   });
 
+function triangle({ base_mm, height_mm }: TriangleShape): Surface {
+  const area_mm2 = (base_mm * height_mm) / 2;
+  return steppedSurface(area_mm2, [
+    because('measure-triangle', [area_mm2, 'mm2'], { base_mm, half_mm: height_mm / 2 }),
+  ]);
+}
+
+function circle({ diameter_mm }: CircleShape): Surface {
+  const area_mm2 = (Math.PI / 4) * diameter_mm ** 2;
+  return steppedSurface(area_mm2, [because('measure-circle', [area_mm2, 'mm2'], { radius_mm: diameter_mm / 2 })]);
+}
+
+function ellipse({ length_mm, height_mm }: EllipseShape): Surface {
+  const area_mm2 = (Math.PI / 4) * length_mm * height_mm;
+  const values = { length_mm: length_mm / 2, height_mm: height_mm / 2 };
+  return steppedSurface(area_mm2, [because('measure-ellipse', [area_mm2, 'mm2'], values)]);
+}
+
+// Told as one would work it on paper: from a line through the lowest corner, what lies below the sides going one way, less what lies below those going back.
+function polygon({ points }: PolygonShape): Surface {
+  const foot_mm = Math.min(...points.map(({ y_mm }) => y_mm));
+  const below = points.map(({ x_mm, y_mm }, index) => {
+    const next = points[(index + 1) % points.length];
+    return ((next.x_mm - x_mm) * (y_mm + next.y_mm - 2 * foot_mm)) / 2;
+  });
+  const sums = [1, -1].map((way) => below.reduce((sum, each) => sum + Math.max(0, way * each), 0));
+  const [back_mm2, out_mm2] = sums.toSorted((one, other) => one - other);
+  return steppedSurface(polygonArea(points.map(({ x_mm, y_mm }) => ({ x: x_mm, y: y_mm }))), [
+    because('measure-outline-out', [out_mm2, 'mm2']),
+    ...(back_mm2 > 0 ? [because('measure-outline-back', [back_mm2, 'mm2'])] : []),
+  ]);
+}
+
 /** The surface of a flat face, in mm and mm²; a rectangle is laid by courses and has a run along its length, a ring one round its middle. */
 export function flatSurface(shape: FlatShape): Surface {
   switch (shape.kind) {
     case 'rectangle':
       return rectangle(shape);
     case 'triangle':
-      return madeSurface({ area_mm2: (shape.base_mm * shape.height_mm) / 2 });
+      return triangle(shape);
     case 'circle':
-      return madeSurface({ area_mm2: (Math.PI / 4) * shape.diameter_mm ** 2 });
+      return circle(shape);
     case 'ellipse':
-      return madeSurface({ area_mm2: (Math.PI / 4) * shape.length_mm * shape.height_mm });
+      return ellipse(shape);
     case 'ring':
       return ring(shape);
     case 'polygon':
-      return madeSurface({ area_mm2: polygonArea(shape.points.map(({ x_mm, y_mm }) => ({ x: x_mm, y: y_mm }))) });
+      return polygon(shape);
   }
 }

@@ -22,6 +22,10 @@ export const madeSurface = (facts: Pick<Surface, 'area_mm2'> & Partial<Surface>)
   ...facts,
 });
 
+/** A surface with no girth and run, by the steps it is worked in; mm². */
+export const steppedSurface = (area_mm2: number, reasons: readonly Reason[], laying: Surface['laying'] = 'sheets') =>
+  madeSurface({ area_mm2, laying, reasons });
+
 /** A surface that is a girth times a run, in mm and mm². */
 export const girthByRun = (facts: Partial<Surface> & { readonly girth_mm: number; readonly run_mm: number }): Surface =>
   madeSurface({

@@ -22,6 +22,7 @@ function partFindings({ surface, zones }: ZonedMember): Finding[] {
   const taken = new Set<string>();
   return zones.flatMap(({ id, take }) => {
     if (take.way !== 'parts') return [];
+    if (take.parts.length === 0) return [{ kind: 'missing', code: 'measure-parts-none', values: {}, about: id }];
     const isUnknown = take.parts.some((key) => !surface.parts.some((part) => part.key === key));
     const isTwice = take.parts.some((key) => taken.has(key));
     take.parts.forEach((key) => taken.add(key));

@@ -116,6 +116,7 @@ describe('The net area of a zone', () => {
       ['refuse measure-openings-too-large'],
     ],
     ['openings as large as the face are not', member(panel, [share(100)], { openings: [{ ...hole, count: 10 }] }), []],
+    ['parts without one chosen are asked for', member(moulding, [parts(), share(100)]), ['missing measure-parts-none']],
     [
       'a part that is not there is refused',
       member(moulding, [parts('top', 'lost'), share(80)]),

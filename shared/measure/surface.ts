@@ -31,7 +31,7 @@ export interface Surface {
   readonly parts: readonly SurfacePart[];
   /** Fields laid by courses; empty for every other shape. */
   readonly courses: readonly Course[];
-  /** How leaf is usually laid on it, proposed from the shape. */
+  /** How leaf is usually laid on its form; relief and width of a zone may propose another way. */
   readonly laying: 'sheets' | 'lays' | 'patches';
   readonly finish: 'plain' | 'moulded' | 'carved';
   /** Already the true surface (measured in the round): relief in the round counts 1.00. */

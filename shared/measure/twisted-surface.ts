@@ -1,7 +1,7 @@
 import { gaussLegendre } from '#shared/geometry/gauss-legendre';
 import { flutedSurface } from '#shared/measure/fluted-surface';
 import type { HelicoidShape, TwistedShape } from '#shared/measure/leg-shape';
-import { because, girthByRun, madeSurface } from '#shared/measure/made-surface';
+import { because, madeSurface } from '#shared/measure/made-surface';
 import { sectionOutline } from '#shared/measure/section-outline';
 import type { Surface } from '#shared/measure/surface';
 
@@ -21,12 +21,19 @@ export function twistedSurface(shape: TwistedShape): Surface {
   const girth_mm = developedGirth(shape, twist);
   const straight_mm = developedGirth(shape, 0);
   const factor = straight_mm === 0 ? 1 : girth_mm / straight_mm;
-  const twisted = girthByRun({
+  const run_mm = shape.length_mm;
+  const twisted = madeSurface({
+    area_mm2: girth_mm * run_mm,
     girth_mm,
-    run_mm: shape.length_mm,
+    run_mm,
+    sides_mm: [run_mm],
     laying: 'patches',
     finish: 'moulded',
-    reasons: [because('measure-twist', [factor, 'factor'])],
+    reasons: [
+      because('measure-girth-straight', [straight_mm, 'mm']),
+      because('measure-twist', [factor, 'factor']),
+      because('measure-run', [run_mm, 'mm']),
+    ],
   });
   return flutedSurface(twisted, shape.fluting);
 }
@@ -50,6 +57,6 @@ export function helicoidSurface({ radius_mm, coreRadius_mm, risePerTurn_mm, turn
     area_mm2: turns * turn_mm2,
     laying: 'patches',
     finish: 'moulded',
-    reasons: [because('measure-helicoid-turn', [turn_mm2, 'mm2'])],
+    reasons: [because('measure-helicoid-turn', [turn_mm2, 'mm2']), because('measure-turns', [turns, 'factor'])],
   });
 }

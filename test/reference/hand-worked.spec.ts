@@ -89,6 +89,49 @@ describe('The bead along the apron by hand: its leaf', () => {
   });
 });
 
+/**
+ * Beside it, the scrolls of the front apron, which are patched: 1244.6 × 152.4 = 189,677 mm², less an oval opening of 140 × 90,
+ * 0.785398 × 12,600 = 9,896 mm², leaves 179,781 mm². The scrolls take 60 % of it, 107,869 mm², in high relief 1.70 times that: 183,377 mm².
+ */
+const scrolls_mm2 = (1244.6 * 152.4 - 0.7853981633974483 * 140 * 90) * 0.6 * 1.7;
+/** A leaf cut two by two loses a lap of 3.2 mm at each cut: a square of 80 − 6.4 = 73.6 mm, 5,416.96 mm². 183,377 ÷ 5,416.96 = 33.852. */
+const scrollsNet = scrolls_mm2 / 5416.96;
+/**
+ * 40 % of them is burnished and 10 % of that laid again; the matte 60 % is laid twice over: 4 + 60 = 64 %. 18 % of the other 36 % is faulted
+ * and 8 % broken: 33.852 × (1 + 0.64 + 0.0648) ÷ 0.92 = 62.730 leaves, at 3.6 minutes each 3.7638 h.
+ */
+const scrollsGross = (scrollsNet * (1 + 0.64 + 0.0648)) / 0.92;
+
+describe('The scrolls of the front apron by hand: their leaf', () => {
+  const draft = demonstrationDraft(pierTableJob(), startCard);
+  const apron = draft.members.filter(({ name }) => name === 'Front apron');
+  const worked = estimateFigures(
+    prepareEstimate({ draft: { ...draft, members: apron }, choice: [], card: startCard, currency: 'EUR' }),
+    null,
+  );
+  const scrolls = worked.zones.find(({ zoneId }) => zoneId === apron[0]?.zones[0]?.id);
+
+  it('is laid in patches, since they are carved in high relief', () => {
+    expect(scrolls?.leaf).toMatchObject({ way: 'patches', cuts: 2 });
+    expect(scrolls?.true_mm2).toBeCloseTo(scrolls_mm2, 6);
+    expect(Math.round(scrolls_mm2)).toBe(183_377);
+  });
+
+  it('takes 33.852 leaves net and 62.730 with what is laid twice, faulted and broken', () => {
+    expect(scrolls?.leaf?.netLeaves).toBeCloseTo(scrollsNet, 9);
+    expect(scrollsNet).toBeCloseTo(33.8523, 4);
+    expect(scrolls?.leaf?.grossLeaves.likely).toBeCloseTo(scrollsGross, 9);
+    expect(scrollsGross).toBeCloseTo(62.7298, 3);
+  });
+
+  it('keeps a gilder for 3.764 h of laying', () => {
+    const laid = scrolls?.steps.filter(({ stepId }) => ['lay', 'fault', 'second-laying'].includes(stepId)) ?? [];
+    const hours = laid.reduce((sum, step) => sum + step.hours.likely, 0);
+    expect(hours).toBeCloseTo((scrollsGross * 3.6) / 60, 9);
+    expect(hours).toBeCloseTo(3.7638, 3);
+  });
+});
+
 // Carving -------------------------------------------------------------------------------------------------------------------------------
 
 /** 1244.6 ÷ 24 = 51.86, so 52 repeats; 355.6 ÷ 24 = 14.82, so 15 on each of the two short lengths: 52 + 15 + 15 = 82. */

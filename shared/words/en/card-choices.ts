@@ -35,7 +35,7 @@ export const cardChoices = {
   'card-laying-patches': 'patches',
   'card-leaf-finish-water-burnished': 'water gilt, burnished',
   'card-leaf-finish-water-matte': 'water gilt, matte',
-  'card-leaf-finish-water-burnished-and-matte': 'water gilt, burnished and matte',
+  'card-leaf-finish-water-burnished-and-matte': 'water gilt, burnished and matte: the burnished part',
   'card-leaf-finish-oil': 'oil gilt',
   'card-charge-booklets': 'whole booklets',
   'card-charge-leaves': 'the leaves used',

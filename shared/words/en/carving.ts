@@ -1,5 +1,6 @@
 export const carving = {
   'carving-first-piece': 'first {ornament}, at {reference_mm}',
+  'carving-each': '{ornament}, each',
   'carving-first-length': '{ornament}, each {reference_mm} of run',
   'carving-first-area': '{ornament}, each square of {reference_mm}',
   'carving-size': 'size {size_mm}, against {reference_mm}',

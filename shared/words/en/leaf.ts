@@ -5,6 +5,8 @@ export const leaf = {
   'leaf-small-pieces': 'small pieces of {girth_mm} by {run_mm}, {across} by {along} from a leaf',
   'leaf-courses':
     '{courses, plural, one {one course} other {# courses}} of {along, plural, one {one leaf} other {# leaves}}, {length_mm} by {height_mm} in steps of {step_mm}',
+  'leaf-narrow-strip':
+    'less than a leaf wide: a strip of {strip_mm} from {length_mm} by {height_mm}, {along, plural, one {one piece} other {# pieces}}, {strips, plural, one {one} other {#}} from a leaf',
   'leaf-last-strip':
     'last strip {strip_mm} wide, {along, plural, one {one piece} other {# pieces}}, {strips, plural, one {one} other {#}} from a leaf',
   'leaf-by-area': 'by area, {area_mm2} in squares of {step_mm}',
@@ -17,6 +19,11 @@ export const leaf = {
     'relief, {relief, select, flat {flat} low {low} middle {middle} high {high} pierced {pierced} other {in the round}}',
   'leaf-net': 'net, for {area_mm2} of true surface',
   'leaf-second-laying': 'second laying',
+  'leaf-second-burnished': 'second laying of the burnished {share_percent}',
+  'leaf-second-matte': 'second laying of the matte {share_percent}',
+  'leaf-second-blended': 'second laying of the whole, each by its share',
+  'leaf-second-parted':
+    'Second laying, water gilt, {share_percent} burnished and the rest matte, {way, select, sheets {sheets} lays {lays} other {patches}}',
   'leaf-faulting': 'faulting of the rest',
   'leaf-breakage': 'breakage',
   'leaf-leaves': 'leaves, {low, number, ::.#} to {high, number, ::.#}',
@@ -37,8 +44,6 @@ export const leaf = {
   'leaf-silver-unsealed':
     '{leaf} tarnishes and needs a seal: {system, select, water {the day it is burnished} other {two to five days after it is laid on oil}}.',
   'leaf-unsealed': '{leaf} darkens in the air and needs a seal.',
-  'leaf-water-outdoors':
-    'Water gilding does not stand outdoors or in the wet. Choose oil gilding over a sealed ground.',
   'leaf-base-metal-on-water': '{leaf} is laid on oil or water-borne size only; choose a build-up with one of these.',
   'leaf-transfer-on-water': 'Transfer leaf cannot be laid by water gilding; choose loose leaf or another build-up.',
   'leaf-transfer-on-carving':

@@ -100,6 +100,20 @@ function materialRates(rates: RatesSheet, material: Material, { words, snapshot 
   };
 }
 
+/** A zone burnished in part has a second laying of its own, by the share that is. */
+function secondRate(
+  { way, ground, losses }: Pick<ZoneLeaf, 'way' | 'ground' | 'losses'>,
+  words: WorkbookFacts['words'],
+): [string, number, string[]] {
+  const finish = ground.finish.replaceAll('-', ' ');
+  const [{ share }, ...others] = losses.secondLayings;
+  const { likely } = losses.second_percent;
+  if (others.length === 0) return [words.say('sheet-second', { way, finish }), likely, ['second', ground.finish, way]];
+  const share_percent = share * 100;
+  const label = words.say('leaf-second-parted', { way, share_percent });
+  return [label, likely, ['second', ground.finish, String(Math.round(share_percent * 100)), way]];
+}
+
 /** Losses are written once for each way of laying, and for each finish it is laid to. */
 function lossRates(rates: RatesSheet, { prepared, words }: WorkbookFacts): GoodsRates['losses'] {
   const known = new Map<string, string>();
@@ -113,11 +127,7 @@ function lossRates(rates: RatesSheet, { prepared, words }: WorkbookFacts): Goods
   const named = ({ way, ground, losses }: ZoneLeaf): LossRates => ({
     breakage: write(words.say('sheet-breakage', { way }), losses.breakage_percent.likely, ['breakage', way]),
     faulting: write(words.say('sheet-faulting', { way }), losses.faulting_percent.likely, ['faulting', way]),
-    second: write(
-      words.say('sheet-second', { way, finish: ground.finish.replaceAll('-', ' ') }),
-      losses.second_percent.likely,
-      ['second', ground.finish, way],
-    ),
+    second: write(...secondRate({ way, ground, losses }, words)),
   });
   for (const { leaf } of prepared.work.zones) if (leaf) named(leaf);
   return named;

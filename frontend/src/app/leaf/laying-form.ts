@@ -8,7 +8,7 @@ import { Field } from '../ui/field/field';
 import { laidAs, layingNames, type LaidAs } from './laying-names';
 import { StripOptions } from './strip-options';
 
-/** How leaf is to be laid on a zone; `proposed` follows the shape, null is worked out. */
+/** How leaf is to be laid on a zone; `proposed` follows shape, relief and width, null is worked out. */
 interface LayingChoice {
   readonly way: 'proposed' | LayingWay;
   readonly strips: number | null;
@@ -93,7 +93,7 @@ export class LayingForm {
     const laid = this.laid();
     return laid && this.present()?.way === 'proposed'
       ? $localize`proposed: ${laidAs(laid)}:laid:`
-      : $localize`as the shape proposes`;
+      : $localize`as proposed`;
   });
 
   protected turn(way: string): void {
