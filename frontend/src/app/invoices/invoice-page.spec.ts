@@ -157,7 +157,7 @@ describe('InvoicePage, issued', () => {
     const note = sampleSummary({ id: invoiceId(20), kind: 'credit-note', number: 'C2026-0002', due_minor: 12_00 });
     const foreign = { ...note, id: invoiceId(21), number: 'C2026-0003', creditedInvoiceId: invoiceId(99) };
     await related(visit, [payment], [{ ...note, creditedInvoiceId: invoiceId(10) }, foreign]);
-    for (const text of ['Open€100.00', '€146.00', 'Credit note C2026-0002', '-€12.00'])
+    for (const text of ['Open€100.00', '€146.00', 'Credit note C2026-0002', '−€12.00'])
       expect(visit.text).toContain(text);
     expect(visit.text).not.toContain('C2026-0003');
     const papers = [...visit.element.querySelectorAll('.papers a')].map((one) => one.getAttribute('href'));
@@ -186,7 +186,7 @@ describe('InvoicePage, issued', () => {
     await related(visit);
     expect(visit.text).toContain('410.00 for 2 pc');
     expect(visit.text).toContain('Reverse charge VATEX-EU-AE');
-    expect(visit.text).toContain('Agreed by telephone 1 Apr 2026, Orla-€5.00');
+    expect(visit.text).toContain('Agreed by telephone 1 Apr 2026, Orla−€5.00');
   });
 
   it('offers writing off to the owner alone, and a reminder only once it is overdue', async () => {

@@ -26,7 +26,7 @@ describe('InvoicesPage', () => {
     );
     const [overdue, credit, draft] = rowsOf(visit);
     expect(overdue).toMatch(/2026-0007.*Ashgrove House.*overdue.*€246\.00 €46\.00$/);
-    expect(credit).toMatch(/C2026-0002.*credit note.*-€246\.00$/);
+    expect(credit).toMatch(/C2026-0002.*credit note.*−€246\.00$/);
     expect(draft).toMatch(/^Invoice.*draft/);
     const links = [...visit.element.querySelectorAll('tbody a')].map((one) => one.getAttribute('href'));
     expect(links).toEqual([10, 20, 21].map((number) => `/accounts/invoices/${invoiceId(number)}`));
