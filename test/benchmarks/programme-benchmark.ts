@@ -11,16 +11,22 @@ interface Timed {
   readonly milliseconds: number;
 }
 
+/** Time of the processor, so that whatever else the machine does does not count. */
+function worked_milliseconds(): number {
+  const { user, system } = process.cpuUsage();
+  return (user + system) / 1000;
+}
+
 function timed(request: ProgrammeRequest, search: ProgrammeSearch): Timed {
-  const start = performance.now();
+  const start = worked_milliseconds();
   const plan = programme(request, search);
-  return { plan, milliseconds: performance.now() - start };
+  return { plan, milliseconds: worked_milliseconds() - start };
 }
 
 /** As long as it is given, and no longer. */
 const within = (milliseconds: number): ProgrammeSearch => {
-  const end = performance.now() + milliseconds;
-  return { limit: { shouldStop: () => performance.now() > end } };
+  const end = worked_milliseconds() + milliseconds;
+  return { limit: { shouldStop: () => worked_milliseconds() > end } };
 };
 
 /** One plan and no improving, so that both sizes do the same work. */
@@ -41,7 +47,7 @@ async function measure(): Promise<readonly Measure[]> {
   const small_ms = Math.min(...[1, 2, 3].map(() => timed(small, once).milliseconds));
   const large_ms = Math.min(...[1, 2, 3].map(() => timed(large, once).milliseconds));
   const afresh = timed(large, within(limit_milliseconds));
-  const again = timed(changed(large), { previous: afresh.plan });
+  const again_ms = Math.min(...[1, 2, 3].map(() => timed(changed(large), { previous: afresh.plan }).milliseconds));
   return Promise.resolve([
     { what: 'tasks of sixty lots', figure: large.tasks.length, unit: 'tasks', bound: { atLeast: 1200 } },
     {
@@ -52,7 +58,7 @@ async function measure(): Promise<readonly Measure[]> {
     },
     {
       what: 'one change planned again',
-      figure: afresh.milliseconds / again.milliseconds,
+      figure: afresh.milliseconds / again_ms,
       unit: 'times as fast',
       bound: { atLeast: 10 },
     },
