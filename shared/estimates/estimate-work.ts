@@ -7,6 +7,7 @@ import { recutZonesById } from '#shared/carving/recut-hours';
 import { carvingLabour } from '#shared/estimates/carving-labour';
 import type { Draft } from '#shared/estimates/draft';
 import { gildingLabour } from '#shared/estimates/gilding-labour';
+import { handlingCautions } from '#shared/estimates/handling-cautions';
 import { goodsUsed } from '#shared/estimates/goods-used';
 import { measuredMember, type MeasuredMember } from '#shared/estimates/measured-member';
 import type { PriceGoods, PriceLabour } from '#shared/estimates/price/price-input';
@@ -103,6 +104,7 @@ export function estimateWork(draft: Draft, card: RateCard): EstimateWork {
       ...zones.flatMap((zone) => zone.findings),
       ...leaf.flatMap((total) => total.findings),
       ...materials.flatMap((bought) => bought.findings),
+      ...handlingCautions(draft, members, card),
     ],
   };
 }

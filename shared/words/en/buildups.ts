@@ -52,6 +52,10 @@ export const buildups = {
   'caution-glue-allergy':
     '{steps}: animal glue can cause allergy of skin and breath. Gloves, and no breathing in of the powder.',
   'caution-glue-heat': '{steps}: never let glue pass 55\u00a0°C. It loses its strength.',
+  'caution-lifting':
+    '{what}: heavy or unwieldy. Lift with two or more, or with a trolley or hoist, and clear the way first; carry by the carcase, never by the carving.',
+  'caution-top-on-base':
+    'A heavy or loose top on a carved or narrow base: have a structural engineer check base and fixing before it is set on it.',
   'caution-defer': 'Follow local codes and the product’s safety data sheet; ask a licensed professional.',
   'buildup-window-closed': 'The next coat cannot be due before it may be put on.',
   'buildup-lag-leads-nowhere': 'This has to name a later step of the same build-up.',
