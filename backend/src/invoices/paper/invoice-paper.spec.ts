@@ -1,14 +1,15 @@
 import { inflateSync } from 'node:zlib';
 import { create } from 'xmlbuilder2';
 import type { FrozenInvoice } from '#shared/invoices/invoice';
+import type { InvoiceLine } from '#shared/invoices/invoice-lines';
 import { invoiceTotals } from '#shared/invoices/invoice-totals';
 import { ublInvoice } from '../ubl/ubl-invoice';
 import { invoicePaper } from './invoice-paper';
 
-const line = {
+const line: InvoiceLine = {
   ...{ id: '1', name: 'Gilding of a frieze', description: '', quantity: '10', unit: 'H87', price: '410.00' },
   ...{ baseQuantity: '2', allowancesCharges: [], tax: { code: 'E', percent: '0' } },
-} as const;
+};
 
 const invoice: FrozenInvoice = {
   ...{ snapshotVersion: 1, kind: 'invoice', number: '2026-0001', currency: 'EUR', isDeposit: false, credits: null },
