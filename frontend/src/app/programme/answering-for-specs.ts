@@ -15,7 +15,7 @@ export interface AskedParts {
 type Answer = (parts: AskedParts) => unknown;
 
 /** A server that answers each endpoint by its name, and notes what it was asked; what it has no answer to is an error. */
-export class AnsweringServer {
+export class AnsweringForSpecs {
   readonly asked: { readonly name: string; readonly parts: AskedParts }[] = [];
   readonly provider: Provider = { provide: Api, useValue: { call: this.call.bind(this) } };
 

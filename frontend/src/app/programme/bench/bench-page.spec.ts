@@ -5,7 +5,7 @@ import type { BenchTask } from '#shared/programme/bench-task';
 import { signIn, words } from '../../../test/sign-in';
 import { NOW } from '../../core/now';
 import { Notices } from '../../core/problems/notices';
-import { AnsweringServer, buttonIn, refusal, spoken, type AskedParts } from '../answering-for-specs';
+import { AnsweringForSpecs, buttonIn, refusal, spoken, type AskedParts } from '../answering-for-specs';
 import { BenchPage } from './bench-page';
 
 const task = (taskId: string, change: Partial<BenchTask> = {}): BenchTask => ({
@@ -23,7 +23,7 @@ const dayOf = (change: Partial<BenchDay> = {}): BenchDay => ({
 
 describe('BenchPage', () => {
   let fixture: ComponentFixture<BenchPage>;
-  let server: AnsweringServer;
+  let server: AnsweringForSpecs;
   const element = () => fixture.nativeElement as HTMLElement;
   const current = () => element().querySelector('article.now') as HTMLElement;
   const settle = async () => {
@@ -36,7 +36,7 @@ describe('BenchPage', () => {
     readBenchDay: (parts: AskedParts) => unknown,
     markTask: (parts: AskedParts) => unknown = () => task('a'),
   ) {
-    server = new AnsweringServer({ readBenchDay, markTask, listFeeds: () => ({ items: [] }) });
+    server = new AnsweringForSpecs({ readBenchDay, markTask, listFeeds: () => ({ items: [] }) });
     const now = { provide: NOW, useValue: () => new Date('2027-01-05T09:00:00Z') };
     TestBed.configureTestingModule({ providers: [words, provideRouter([]), server.provider, now] });
     signIn(['bench']);

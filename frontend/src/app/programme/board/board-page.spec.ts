@@ -3,7 +3,7 @@ import { provideRouter } from '@angular/router';
 import type { BoardAnswer, BoardJob } from '#shared/programme/board-schema';
 import { signIn, words } from '../../../test/sign-in';
 import { NOW } from '../../core/now';
-import { AnsweringServer, refusal, spoken } from '../answering-for-specs';
+import { AnsweringForSpecs, refusal, spoken } from '../answering-for-specs';
 import { StillObserver } from '../ribbon/ribbon-for-specs';
 import { BoardPage } from './board-page';
 
@@ -31,7 +31,7 @@ describe('BoardPage', () => {
 
   async function open(readBoard: () => unknown) {
     globalThis.ResizeObserver = StillObserver;
-    const server = new AnsweringServer({ readBoard });
+    const server = new AnsweringForSpecs({ readBoard });
     const now = { provide: NOW, useValue: () => new Date('2027-01-04T09:00:00Z') };
     TestBed.configureTestingModule({ providers: [words, provideRouter([]), server.provider, now] });
     signIn(['owner']);

@@ -6,16 +6,16 @@ import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import type { ProgrammeAnswer } from '#shared/programme/programme-schema';
 import { signIn, words } from '../../../test/sign-in';
 import { NOW } from '../../core/now';
-import { AnsweringServer, type AskedParts, buttonIn, refusal, spoken } from '../answering-for-specs';
+import { AnsweringForSpecs, type AskedParts, buttonIn, refusal, spoken } from '../answering-for-specs';
 import { StillObserver } from '../ribbon/ribbon-for-specs';
 import { EstimateProgramme } from './estimate-programme';
-import { PlanningHere } from './planning-here-for-specs';
+import { PlanningHereForSpecs } from './planning-here-for-specs';
 import { PLANNING_STARTER } from './planning-starter';
 import { programmeForSpecs } from './programme-for-specs';
 
 describe('EstimateProgramme', () => {
   let fixture: ComponentFixture<EstimateProgramme>;
-  let server: AnsweringServer;
+  let server: AnsweringForSpecs;
   let told: (string | undefined)[];
   const element = () => fixture.nativeElement as HTMLElement;
   const settle = async () => {
@@ -41,7 +41,7 @@ describe('EstimateProgramme', () => {
     jest.spyOn(HTMLElement.prototype, 'clientWidth', 'get').mockReturnValue(1200);
     jest.spyOn(HTMLElement.prototype, 'clientHeight', 'get').mockReturnValue(600);
     told = [];
-    server = new AnsweringServer({
+    server = new AnsweringForSpecs({
       readProgramme: () => programmeForSpecs(read),
       readShop: () => ({ content: { people: [{ id: 'gina', name: 'Gina' }] } }),
       keepProgramme: keep,
@@ -49,7 +49,7 @@ describe('EstimateProgramme', () => {
         programmeForSpecs({ plan: body as ProgrammeAnswer['plan'], version: (version ?? 0) + 1 }),
     });
     const now = { provide: NOW, useValue: () => new Date('2027-01-04T09:00:00Z') };
-    const starter = { provide: PLANNING_STARTER, useValue: () => Promise.resolve(new PlanningHere()) };
+    const starter = { provide: PLANNING_STARTER, useValue: () => Promise.resolve(new PlanningHereForSpecs()) };
     TestBed.configureTestingModule({ providers: [words, provideRouter([]), server.provider, starter, now] });
     signIn(roles);
     fixture = TestBed.createComponent(EstimateProgramme, {

@@ -2,7 +2,7 @@ import type { PagePlanning } from '#shared/programme/page-planning';
 import { programme } from '#shared/programme/programme';
 
 /** A worker that plans where it stands. */
-export class PlanningHere extends EventTarget {
+export class PlanningHereForSpecs extends EventTarget {
   terminate(): void {
     return;
   }

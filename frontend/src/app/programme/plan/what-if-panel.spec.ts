@@ -4,9 +4,9 @@ import { programme } from '#shared/programme/programme';
 import { personForSpecs } from '#shared/programme/request-for-specs';
 import type { WhatIf } from '#shared/programme/what-if';
 import { signIn, words } from '../../../test/sign-in';
-import { AnsweringServer, buttonIn, spoken, type AskedParts } from '../answering-for-specs';
+import { AnsweringForSpecs, buttonIn, spoken, type AskedParts } from '../answering-for-specs';
 import { PLANNING_STARTER } from './planning-starter';
-import { PlanningHere } from './planning-here-for-specs';
+import { PlanningHereForSpecs } from './planning-here-for-specs';
 import { programmeForSpecs } from './programme-for-specs';
 import { ProgrammeStore } from './programme-store';
 import { WhatIfPanel } from './what-if-panel';
@@ -15,7 +15,7 @@ const answer = programmeForSpecs();
 
 describe('WhatIfPanel', () => {
   let fixture: ComponentFixture<WhatIfPanel>;
-  let server: AnsweringServer;
+  let server: AnsweringForSpecs;
   const element = () => fixture.nativeElement as HTMLElement;
   const settle = async () => {
     for (let turn = 0; turn < 4; turn += 1) {
@@ -41,12 +41,12 @@ describe('WhatIfPanel', () => {
   }
 
   async function open() {
-    server = new AnsweringServer({
+    server = new AnsweringForSpecs({
       readProgramme: () => answer,
       readShop: () => ({ content: { people: [] } }),
       readWhatIf: whatIf,
     });
-    const starter = { provide: PLANNING_STARTER, useValue: () => Promise.resolve(new PlanningHere()) };
+    const starter = { provide: PLANNING_STARTER, useValue: () => Promise.resolve(new PlanningHereForSpecs()) };
     TestBed.configureTestingModule({ providers: [words, server.provider, starter, ProgrammeStore] });
     signIn(['estimator']);
     TestBed.inject(ProgrammeStore).open(answer.estimateId, 0);

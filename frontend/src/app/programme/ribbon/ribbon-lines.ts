@@ -1,4 +1,4 @@
-import { laidTasks, seenTasks, type DrawnLot, type DrawnPart, type DrawnTask } from './ribbon-layout';
+import { laidTasks, seenTasks, type DrawnLot, type DrawnPart, type DrawnTask } from './laid-tasks';
 import type { RibbonLot } from './ribbon-lot';
 import type { RibbonScale } from './ribbon-scale';
 

@@ -1,5 +1,5 @@
 import { computed, signal, type Signal } from '@angular/core';
-import type { DrawnLot, DrawnTask } from './ribbon-layout';
+import type { DrawnLot, DrawnTask } from './laid-tasks';
 import type { RibbonTask } from './ribbon-lot';
 import { storyPlace } from './story-place';
 import { TaskDrag, type DraggedTask } from './task-drag';

@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { ribbonBar } from './ribbon-bar';
-import type { DrawnLot, DrawnTask, Stretch } from './ribbon-layout';
+import type { DrawnLot, DrawnTask, Stretch } from './laid-tasks';
 
 const dryingBar = { y: 14, height: 26, radius: 0 };
 const windowBar = { y: 9, height: 36, radius: 6 };

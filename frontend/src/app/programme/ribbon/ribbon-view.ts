@@ -1,5 +1,5 @@
 import { computed, signal, type Signal } from '@angular/core';
-import type { DrawnPart } from './ribbon-layout';
+import type { DrawnPart } from './laid-tasks';
 import { pixelOf, scrolledAfterZoom, widthOf, withinZoom, type RibbonScale } from './ribbon-scale';
 
 /** What is seen of the sheet, in pixels. */

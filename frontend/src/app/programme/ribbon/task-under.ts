@@ -1,4 +1,4 @@
-import type { DrawnLot, DrawnTask } from './ribbon-layout';
+import type { DrawnLot, DrawnTask } from './laid-tasks';
 
 const far = ({ work, touch }: DrawnTask, x: number): number =>
   work.length === 0

@@ -3,7 +3,7 @@ import { provideRouter } from '@angular/router';
 import type { ShopContent } from '#shared/programme/shop-schema';
 import { signIn, words } from '../../../test/sign-in';
 import { Notices } from '../../core/problems/notices';
-import { AnsweringServer, type AskedParts, buttonIn, refusal, spoken } from '../answering-for-specs';
+import { AnsweringForSpecs, type AskedParts, buttonIn, refusal, spoken } from '../answering-for-specs';
 import { shopForSpecs } from './shop-for-specs';
 import { ShopPage } from './shop-page';
 
@@ -22,7 +22,7 @@ const withRack = (change: object): ShopContent => ({
 
 describe('ShopPage', () => {
   let fixture: ComponentFixture<ShopPage>;
-  let server: AnsweringServer;
+  let server: AnsweringForSpecs;
   const element = () => fixture.nativeElement as HTMLElement;
   const settle = async () => {
     await fixture.whenStable();
@@ -32,7 +32,7 @@ describe('ShopPage', () => {
   const kept = ({ body, version }: AskedParts) => ({ ...known, version: (version ?? 0) + 1, content: body });
 
   async function open(keepShop: (parts: AskedParts) => unknown = kept, version = 3) {
-    server = new AnsweringServer({ readShop: () => ({ ...known, version, content: shop }), keepShop });
+    server = new AnsweringForSpecs({ readShop: () => ({ ...known, version, content: shop }), keepShop });
     TestBed.configureTestingModule({ providers: [words, provideRouter([]), server.provider] });
     signIn(['owner']);
     fixture = TestBed.createComponent(ShopPage);

@@ -9,7 +9,7 @@ import { Formats } from '../../core/formats/formats';
 import { Words } from '../../core/formats/words';
 import { Notices } from '../../core/problems/notices';
 import { ProblemError } from '../../core/problems/problem-error';
-import { mergedShop, shopDifferences } from './shop-merging';
+import { mergedShop, shopDifferences } from './merged-shop';
 import { ShopWords } from './shop-words';
 
 type Path = readonly (string | number)[];

@@ -1,5 +1,5 @@
 import { ribbonForSpecs, ribbonLot, ribbonTask } from './ribbon-for-specs';
-import type { DrawnPart } from './ribbon-layout';
+import type { DrawnPart } from './laid-tasks';
 import type { RibbonLot } from './ribbon-lot';
 import { RibbonLines } from './ribbon-lines';
 

@@ -1,7 +1,7 @@
 import { TestBed } from '@angular/core/testing';
 import { signIn, words } from '../../../test/sign-in';
 import { Formats } from '../../core/formats/formats';
-import { mergedShop, shopDifferences } from './shop-merging';
+import { mergedShop, shopDifferences } from './merged-shop';
 import { shopForSpecs } from './shop-for-specs';
 import { ShopWords } from './shop-words';
 
