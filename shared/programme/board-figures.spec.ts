@@ -6,6 +6,7 @@ import { programme } from '#shared/programme/programme';
 import { programmeFrame } from '#shared/programme/programme-frame';
 import type { ProgrammeItem } from '#shared/programme/programme-item';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
+import { pooledPlaces } from '#shared/programme/pooled-places';
 import { promiseClashes } from '#shared/programme/promise-clashes';
 import { promisedWork } from '#shared/programme/promised-plan';
 import {
@@ -119,7 +120,9 @@ describe('What is promised twice', () => {
       promised('two', { ...placed, people: [personForSpecs('tom', 'gilder')] }),
     ].map(promisedWork);
     const clashes = (capacity: number) =>
-      promiseClashes(work, [{ id: 'rack', capacity }]).map(({ kind, id }) => [kind, id]);
+      promiseClashes(work, pooledPlaces({ places: [{ id: 'rack', name: 'Rack', kind: 'rack', capacity }] })).map(
+        ({ kind, id }) => [kind, id],
+      );
     expect(clashes(4)).toEqual([]);
     expect(clashes(3)).toEqual([['place', 'rack']]);
   });

@@ -1,5 +1,6 @@
 import { addDays } from '#shared/calendar/add-days';
 import { minutesOfDay, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import { pooledPlaces } from '#shared/programme/pooled-places';
 import type { PromisedWork } from '#shared/programme/promised-work';
 import type { Shop, ShopPerson } from '#shared/programme/shop';
 import { weekHours } from '#shared/programme/shop-calendar-of';
@@ -30,13 +31,13 @@ export const peopleOfShop = (shop: Shop, frame: ProgrammeFrame, promised: readon
     away: [...absencesOf(person, frame), ...promisedSpans(person.id, promised)],
   }));
 
-/** Racks and benches with what of them is promised elsewhere. */
+/** Racks and benches, each kind as one, with what of them is promised elsewhere. */
 export const placesOfShop = (shop: Shop, promised: readonly PromisedWork[]): Place[] =>
-  shop.places.map(({ id, name, capacity }) => ({
+  pooledPlaces(shop).map(({ id, name, capacity, placeIds }) => ({
     ...{ id, name, capacity },
     taken: promised.flatMap(({ places }) =>
       places
-        .filter((work) => work.placeId === id)
+        .filter((work) => placeIds.includes(work.placeId))
         .map(({ start_minutes, end_minutes, amount }) => ({ start_minutes, end_minutes, amount })),
     ),
   }));

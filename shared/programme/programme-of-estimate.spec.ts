@@ -285,6 +285,26 @@ describe('What has happened', () => {
       },
     ]);
   });
+
+  it('gives whatever is carved a bench while it is carved, and takes places of a kind together', () => {
+    const places = [
+      { id: 'bench', name: 'Bench', kind: 'bench' as const, capacity: 1 },
+      { id: 'long', name: 'Long rack', kind: 'rack' as const, capacity: 2 },
+      { id: 'short', name: 'Short rack', kind: 'rack' as const, capacity: 3 },
+    ];
+    const span = { start_minutes: 480, end_minutes: 900 };
+    const promised = [{ estimateId: 'other', people: [], places: [{ ...span, placeId: 'short', amount: 2 }] }];
+    const { request } = programmeFor([panel], { shop: { ...named, places }, promised });
+    expect(request.places).toEqual([
+      { id: 'long', name: 'Long rack, Short rack', capacity: 5, taken: [{ ...span, amount: 2 }] },
+      { id: 'bench', name: 'Bench', capacity: 1, taken: [] },
+    ]);
+    const carved = request.tasks.filter(({ id }) => id.includes('/carving/')).map(({ id }) => id);
+    expect(carved.length).toBeGreaterThan(0);
+    expect(request.placeHolds.filter(({ placeId }) => placeId === 'bench')).toEqual(
+      carved.map((id) => ({ placeId: 'bench', amount: 1, fromTaskId: id, untilTaskId: id })),
+    );
+  });
 });
 
 /** The day and the time by the clock on the wall of a zone, as the machine's own calendar has them. */

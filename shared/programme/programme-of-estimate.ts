@@ -19,7 +19,7 @@ import { placeHoldsOf } from '#shared/programme/place-holds-of';
 import { minutesOf, minutesOfDay, type ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { ProgrammeInputs, TaskMark } from '#shared/programme/programme-inputs';
 import type { ProgrammeItem } from '#shared/programme/programme-item';
-import type { ProgrammeLag, ProgrammeRequest } from '#shared/programme/programme-request';
+import type { ProgrammeLag, ProgrammeRequest, ProgrammeTask } from '#shared/programme/programme-request';
 import type { PromisedWork } from '#shared/programme/promised-work';
 import { requestFindings } from '#shared/programme/request-findings';
 import type { Shop } from '#shared/programme/shop';
@@ -149,6 +149,7 @@ function requestOf(
     lags: readonly ProgrammeLag[];
     approvals: readonly ProgrammeApproval[];
     lots: readonly PlannedLot[];
+    carving: readonly ProgrammeTask[];
     paces: ProgrammeRequest['paces'];
   },
 ): ProgrammeRequest {
@@ -163,7 +164,7 @@ function requestOf(
     })),
     people: peopleOfShop(shop, frame, promised),
     places: placesOfShop(shop, promised),
-    placeHolds: placeHoldsOf(parts.lots, shop),
+    placeHolds: placeHoldsOf(parts, shop),
     paces: parts.paces,
   };
 }
@@ -185,7 +186,8 @@ export function programmeOfEstimate(asked: ProgrammeOfEstimateInput): EstimatePr
   ];
   const approvals = lots.flatMap((lot) => approvalsOf(lot, carved, asked)).map((one) => given(one, asked));
   const { paces, findings } = dryingPaces(airOf(asked), asked.frame, asked.card.drying);
-  const request = requestOf(asked, { tasks, lags, approvals, lots, paces });
+  const carving = carved.flatMap((one) => one.tasks).map(({ task }) => task);
+  const request = requestOf(asked, { tasks, lags, approvals, lots, carving, paces });
   const items = tasks.map(({ item }) => item);
   const told = [...findings, ...requestFindings(request, items, asked.shop)];
   return { request, items, approvals, otherSizes: otherSizes(lots, lags, asked.card), findings: told };

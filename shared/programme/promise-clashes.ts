@@ -1,3 +1,4 @@
+import type { PooledPlaces } from '#shared/programme/pooled-places';
 import type { PromisedWork } from '#shared/programme/promised-work';
 import type { MomentSpan } from '#shared/programme/shop-calendar';
 
@@ -39,15 +40,13 @@ function claimsById(claims: readonly Claim[]): Map<string, Claim[]> {
 }
 
 /** What is promised twice: people at two tasks at once, racks and benches over what they hold; in the minutes of the frame of the work given. */
-export function promiseClashes(
-  promised: readonly PromisedWork[],
-  places: readonly { readonly id: string; readonly capacity: number }[],
-): PromiseClash[] {
+export function promiseClashes(promised: readonly PromisedWork[], places: readonly PooledPlaces[]): PromiseClash[] {
+  const poolOf = (id: string) => places.find(({ placeIds }) => placeIds.includes(id))?.id ?? id;
   const people = promised.flatMap((work) =>
     work.people.map((span): Claim => ({ ...span, id: span.personId, amount: 1, estimateId: work.estimateId })),
   );
   const rooms = promised.flatMap((work) =>
-    work.places.map((span): Claim => ({ ...span, id: span.placeId, estimateId: work.estimateId })),
+    work.places.map((span): Claim => ({ ...span, id: poolOf(span.placeId), estimateId: work.estimateId })),
   );
   const capacityOf = (id: string) => places.find((place) => place.id === id)?.capacity ?? 0;
   return [

@@ -6,6 +6,7 @@ import { gradeLoads, mondayOf } from '#shared/programme/grade-loads';
 import { peopleOfShop } from '#shared/programme/people-of-shop';
 import { shopSpans } from '#shared/programme/person-spans';
 import { instantOf, programmeFrame, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import { pooledPlaces } from '#shared/programme/pooled-places';
 import { promiseClashes } from '#shared/programme/promise-clashes';
 import { promisedWork } from '#shared/programme/promised-plan';
 import type { Shop } from '#shared/programme/shop';
@@ -45,8 +46,9 @@ const marksOf = (rows: readonly MarkRow[], programmeId: string) =>
   rows.filter((row) => row.programmeId === programmeId).map(presentMark);
 
 function clashes({ jobs, shop, frame }: Board): BoardAnswer['clashes'] {
-  const nameOf = (id: string) => [...shop.people, ...shop.places].find((one) => one.id === id)?.name ?? '';
-  return promiseClashes(jobs.map(promisedWork), shop.places).map(
+  const places = pooledPlaces(shop);
+  const nameOf = (id: string) => [...shop.people, ...places].find((one) => one.id === id)?.name ?? '';
+  return promiseClashes(jobs.map(promisedWork), places).map(
     ({ kind, id, start_minutes, end_minutes, estimateIds }) => ({
       ...{ kind, id, name: nameOf(id), estimateIds: [...estimateIds] },
       ...{ startsAt: instantOf(start_minutes, frame), endsAt: instantOf(end_minutes, frame) },

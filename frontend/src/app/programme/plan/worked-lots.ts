@@ -37,10 +37,12 @@ function workedLot(lotId: string, items: readonly Item[], { request, inputs }: P
   const ids = new Set(items.map(({ taskId }) => taskId));
   const tasks = request.tasks.filter(({ id, crew }) => ids.has(id) && crew > 0);
   const [{ lot, piece }] = items;
-  const rack = request.places.at(0);
   const held = request.placeHolds.find(({ fromTaskId }) => ids.has(fromTaskId));
+  const input = inputs.lots.find((one) => one.lotId === lotId) ?? null;
+  // A lot that takes no place is asked for one again; racks stand before benches.
+  const rack = request.places.find(({ id }) => id === held?.placeId || input?.places === 0);
   return {
-    ...{ lotId, name: lot, piece, input: inputs.lots.find((one) => one.lotId === lotId) ?? null },
+    ...{ lotId, name: lot, piece, input },
     portions: Math.max(1, ...items.map(({ portions }) => portions)),
     crew: Math.max(1, ...tasks.map(({ crew }) => crew)),
     mostPeople: Math.max(1, ...tasks.map(({ mostPeople }) => mostPeople)),
