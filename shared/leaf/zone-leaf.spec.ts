@@ -2,6 +2,8 @@ import fc from 'fast-check';
 import { startLeaf } from '#shared/leaf/start-leaf';
 import { zoneLeaf } from '#shared/leaf/zone-leaf';
 import type { ZoneLeafInput } from '#shared/leaf/zone-leaf-input';
+import { finishes, reliefs } from '#shared/measure/relief';
+import { startMeasure } from '#shared/measure/start-measure';
 import type { Surface } from '#shared/measure/surface';
 import { en } from '#shared/words/en';
 import { say } from '#shared/words/say';
@@ -258,6 +260,30 @@ describe('zoneLeaf', () => {
 
   const ways = fc.constantFrom('sheets' as const, 'lays' as const, 'patches' as const);
   const length = fc.double({ min: 1, max: 3000, noNaN: true });
+
+  it('as proposed never lays less leaf than there is true surface, however small, narrow or carved', () => {
+    const side = fc.oneof(length, fc.double({ min: 1, max: 45, noNaN: true }));
+    fc.assert(
+      fc.property(
+        side,
+        side,
+        fc.integer({ min: 1, max: 60 }),
+        fc.constantFrom(...reliefs),
+        fc.constantFrom(...finishes),
+        (length_mm, height_mm, members, relief, finish) => {
+          const surface = {
+            ...field,
+            area_mm2: length_mm * height_mm,
+            courses: [{ length_mm, height_mm, closed: false }],
+          };
+          const reliefFactor = startMeasure.reliefFactors[relief];
+          const zone = laid({ surface, partKeys: null, members, relief, finish, reliefFactor });
+          expect(zone.trueArea_mm2).toBeCloseTo(length_mm * height_mm * members * reliefFactor, 3);
+          expect(zone.netLeaves * 6400).toBeGreaterThanOrEqual(zone.trueArea_mm2 * (1 - 2e-6));
+        },
+      ),
+    );
+  });
 
   it('never lays less leaf than there is true surface, and never draws less than it lays', () => {
     fc.assert(

@@ -66,7 +66,8 @@ it('founds a workshop, opens a job, costs a base and issues it with its papers',
   await see('journey measured');
   await page.getByRole('link', { name: /Gild/ }).click();
   await page.getByRole('button', { name: 'Add a zone' }).click();
-  await page.getByRole('link', { name: 'Gild 3 booklets' }).waitFor();
+  // 15 cm are less than two leaves, so it is laid in lays: 32 leaves net each, 64 × (1 + 0.05 + 0.12 × 0.95) ÷ 0.95 = 78.4 of 25 a booklet.
+  await page.getByRole('link', { name: 'Gild 4 booklets' }).waitFor();
   await see('journey gild');
   await page.getByRole('link', { name: /^Price/ }).click();
   await page.getByRole('heading', { name: 'Lines' }).waitFor();

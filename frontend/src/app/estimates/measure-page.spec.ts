@@ -185,6 +185,32 @@ describe('MeasurePage', () => {
     expect(profile()).toEqual(['fillet', 'ovolo', 'ovolo', 'fillet']);
   });
 
+  it('marks a zone that belongs to an alternative, so that two wholes do not look like twice the surface', async () => {
+    await open();
+    const [edge] = store.members();
+    const [base] = edge.zones;
+    const { id: _id, ...content } = edge;
+    store.changeSettings({ alternatives: [{ id: 'oil', name: 'In oil', group: '', note: '', replaces: [base.id] }] });
+    const other = { ...base, id: '018f0000-0000-7000-8000-000000000950', alternativeId: 'oil' };
+    store.changeMember(ids.edge, { ...content, zones: [base, other] });
+    await settle();
+    const marks = [...element().querySelectorAll('app-zone-list .item')].map((one) =>
+      one.textContent?.includes('in “In oil”'),
+    );
+    expect(marks).toEqual([false, true]);
+  });
+
+  it('asks for parts of a zone that takes parts and has none', async () => {
+    await open();
+    await show(ids.edge);
+    const [edge] = store.members();
+    const { id: _id, ...content } = edge;
+    const parts = { ...edge.zones[0], take: { way: 'parts' as const, parts: [] } };
+    store.changeMember(ids.edge, { ...content, zones: [parts] });
+    await settle();
+    expect(element().querySelector('app-finding-list')?.textContent).toContain('but none is chosen');
+  });
+
   it('takes a zone by parts of the profile', async () => {
     await open();
     await click('Another shape');

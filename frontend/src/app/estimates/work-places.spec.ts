@@ -165,7 +165,29 @@ describe('The places of work', () => {
       const taken = zone({ ...toned, alternativeId: id(40) });
       store.changeMember(ids.edge, { ...content, zones: [...content.zones, taken] });
       await settle();
-      expect(rows()[1]?.slice(0, 2)).toEqual(['All of it, toned in “Toned, not gilt”', 'Toned back']);
+      expect(rows()[1]?.slice(0, 2)).toEqual([
+        'All of it, toned in “Toned, not gilt”, figures with that choice, in no sum',
+        'Toned back',
+      ]);
+    });
+
+    it('works a zone of an alternative that is not chosen as if it was, and adds it to no sum', async () => {
+      const { element, rows, settle, store } = await open(GildPage);
+      const total = () => element.querySelector('app-figure-table tfoot')?.textContent?.replace(/[\s\u00a0]+/g, ' ');
+      const edge = store.members().find((one) => one.id === ids.edge);
+      if (!edge) throw new Error('there is no edge');
+      const { id: _id, ...content } = edge;
+      const [base] = content.zones;
+      const alternative = { id: id(42), name: 'Matte', group: '', note: '', replaces: [base.id] };
+      const leaves = rows()[0]?.[4];
+      store.changeSettings({ alternatives: [alternative] });
+      const matte = zone({ id: id(43), name: 'All of it, matte', buildUpId: 'water-burnished', alternativeId: id(42) });
+      store.changeMember(ids.edge, { ...content, zones: [base, { ...matte, take: base.take, relief: base.relief }] });
+      await settle();
+      // The same surface in the same way takes the same leaf.
+      expect(rows()[1]?.[4]).toBe(leaves);
+      expect(rows()[1]?.[4]).toMatch(/^\d/);
+      expect(total()).toContain(`600 cm² ${leaves} `);
     });
 
     it('shows the bench no money', async () => {
@@ -320,6 +342,18 @@ describe('The places of work', () => {
         expect(rows()[0]?.[0]).toBe('Water gilding, burnished Top edge');
         expect(element.querySelector('app-lot-members')).toBeNull();
       });
+    });
+
+    it('tells each zone’s hands-on time with the waiting of its lot', async () => {
+      const { element, store } = await open(DryPage);
+      const cells = [...element.querySelectorAll('app-zone-times tbody td')].map((cell) =>
+        cell.textContent?.trim().replace(/[\s\u00a0]+/g, ' '),
+      );
+      const waiting = element.querySelectorAll('app-lot-table tbody td')[2]?.textContent?.trim();
+      expect(cells.slice(0, 2)).toEqual(['Top edge, All of it', 'Water gilding, burnished']);
+      expect(cells[2]).toBe(`${(store.figures()?.zones[0]?.hours.likely ?? 0).toFixed(1)} h`);
+      expect(cells[3]).toBe(waiting?.replace(/[\s\u00a0]+/g, ' '));
+      expect(cells[3]).toMatch(/^\d/);
     });
 
     it('draws approvals in the ribbon and tells them in a table', async () => {

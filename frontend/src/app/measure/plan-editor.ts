@@ -2,9 +2,12 @@ import { ChangeDetectionStrategy, Component, computed, inject, input } from '@an
 import type { MouldingPlan, PolygonPlan } from '#shared/measure/moulding-shape';
 import { planClosure } from '#shared/measure/plan-closure';
 import type { AnyDocumentForm } from '../core/forms/document-form';
+import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
 import { EntryAt } from '../ui/field/entry-at';
+import { changedPlan } from './changed-plan';
 import { ChoiceEntry } from './choice-entry';
+import { offeredIn } from './first-shape';
 import { RowsEditor } from './rows-editor';
 import type { ShapeEntry } from './shape-entries';
 
@@ -12,13 +15,6 @@ type PlanForm = MouldingPlan['form'];
 
 const sideLength: ShapeEntry = { path: '', label: $localize`Length`, way: 'length' };
 const turn: ShapeEntry = { path: '', label: $localize`Turn`, way: 'number', unit: '°' };
-
-const starts: Readonly<Record<PlanForm, (sides_mm: readonly number[]) => MouldingPlan>> = {
-  straight: (sides_mm) => ({ form: 'straight', sides_mm, returns_mm: [] }),
-  arc: () => ({ form: 'arc', radius_mm: 600, angle_degrees: 90 }),
-  ellipse: () => ({ form: 'ellipse', length_mm: 800, width_mm: 500 }),
-  polygon: () => ({ form: 'polygon', sides_mm: [800, 400, 800, 400], turns_degrees: [90, 90, 90, 90], closed: true }),
-};
 
 /** The plan a moulding runs along: straight lengths with returns, a sweep, an oval, or sides that meet in mitres. */
 @Component({
@@ -45,6 +41,9 @@ const starts: Readonly<Record<PlanForm, (sides_mm: readonly number[]) => Mouldin
 })
 export class PlanEditor {
   private readonly words = inject(Words);
+  private readonly formats = inject(Formats);
+  /** Plans as they were when another form was chosen: who goes back finds them again. */
+  private readonly left = new Map<string, MouldingPlan>();
 
   readonly form = input.required<AnyDocumentForm>();
   /** Where the moulding stands in the document. */
@@ -86,21 +85,37 @@ export class PlanEditor {
 
   protected change(form: string): void {
     const before = this.plan();
-    const sides_mm = before && 'sides_mm' in before ? before.sides_mm : [1000];
-    this.form().put(`${this.path()}.plan`, starts[form as PlanForm](sides_mm));
+    if (!before) return;
+    this.left.set(this.keyOf(before.form), before);
+    const known = this.left.get(this.keyOf(form as PlanForm));
+    this.form().put(`${this.path()}.plan`, known ?? changedPlan(before, form as PlanForm, this.formats.lengthUnit()));
+  }
+
+  /** One and the same moulding: what it is called and its profile. */
+  private keyOf(form: PlanForm): string {
+    const profile = this.form().value<unknown>(`${this.path()}.profile`);
+    return JSON.stringify([this.form().value<unknown>('name'), profile, form]);
   }
 
   protected addSide(index: number): void {
-    this.form().insert(this.at('sides_mm'), index, this.form().value<number>(this.at(`sides_mm.${index - 1}`)) ?? 500);
+    this.form().insert(
+      this.at('sides_mm'),
+      index,
+      this.form().value<number>(this.at(`sides_mm.${index - 1}`)) ?? this.offered(500),
+    );
     if (this.plan()?.form === 'polygon') this.form().insert(this.at('turns_degrees'), this.turns(), 90);
   }
 
   protected addReturn(index: number): void {
-    this.form().insert(this.at('returns_mm'), index, 100);
+    this.form().insert(this.at('returns_mm'), index, this.offered(100));
   }
 
   protected addTurn(index: number): void {
     this.form().insert(this.at('turns_degrees'), index, 90);
+  }
+
+  private offered(length_mm: number): number {
+    return offeredIn(this.formats.lengthUnit(), { length_mm }).length_mm;
   }
 
   private turns(): number {

@@ -1,9 +1,11 @@
-import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, inject, input } from '@angular/core';
 import type { ProfileElement } from '#shared/measure/profile-element';
 import type { AnyDocumentForm } from '../core/forms/document-form';
+import { Formats } from '../core/formats/formats';
 import { newId } from '../core/new-id';
 import { changedElement, nextElement } from './changed-element';
 import { elementKinds, elementNames } from './element-names';
+import { offeredIn } from './first-shape';
 import { type PickedKind, RowsEditor } from './rows-editor';
 import type { ShapeEntry } from './shape-entries';
 
@@ -57,6 +59,8 @@ function cellsOf(row: unknown): readonly (ShapeEntry | undefined)[] {
   `,
 })
 export class ProfileEditor {
+  private readonly formats = inject(Formats);
+
   readonly form = input.required<AnyDocumentForm>();
   readonly path = input.required<string>();
   readonly isDisabled = input(false);
@@ -73,12 +77,13 @@ export class ProfileEditor {
 
   protected add(index: number): void {
     const last = this.form().value<ProfileElement>(`${this.path()}.${index - 1}`);
-    this.form().insert(this.path(), index, nextElement(last, newId()));
+    this.form().insert(this.path(), index, offeredIn(this.formats.lengthUnit(), nextElement(last, newId())));
   }
 
   protected change({ index, kind }: PickedKind): void {
     const path = `${this.path()}.${index}`;
     const before = this.form().value<ProfileElement>(path);
-    if (before) this.form().put(path, changedElement(before, kind as ProfileElement['element']));
+    if (before)
+      this.form().put(path, changedElement(before, kind as ProfileElement['element'], this.formats.lengthUnit()));
   }
 }

@@ -1,9 +1,10 @@
-import { ChangeDetectionStrategy, Component, computed, input, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { type Shape, type ShapeKind, shapeKinds } from '#shared/measure/shape';
 import { shapeDefaults } from '#shared/measure/shape-defaults';
 import { type BoxFace, boxFaces } from '#shared/measure/solid-shape';
 import type { AnyDocumentForm } from '../core/forms/document-form';
+import { Formats } from '../core/formats/formats';
 import { EntryAt } from '../ui/field/entry-at';
 import { BandEditor } from './band-editor';
 import { changedShape } from './changed-shape';
@@ -59,6 +60,8 @@ const fluted: readonly ShapeKind[] = [
   styleUrl: './shape-form.scss',
 })
 export class ShapeForm {
+  private readonly formats = inject(Formats);
+
   readonly form = input.required<AnyDocumentForm>();
   /** Where the shape stands in the document. */
   readonly path = input.required<string>();
@@ -82,6 +85,7 @@ export class ShapeForm {
   protected take(kind: ShapeKind): void {
     this.isChoosing.set(false);
     const before = this.shape();
-    if (before && before.kind !== kind) this.form().put(this.path(), changedShape(before, kind));
+    if (before && before.kind !== kind)
+      this.form().put(this.path(), changedShape(before, kind, this.formats.lengthUnit()));
   }
 }

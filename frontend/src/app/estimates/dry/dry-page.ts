@@ -16,6 +16,7 @@ import { DryLots } from './dry-lots';
 import { LotMembers } from './lot-members';
 import { LotTable } from './lot-table';
 import { WoodMoisture } from './wood-moisture';
+import { ZoneTimes } from './zone-times';
 
 /** Dry: the coats of every lot laid into the working week in the shop's air, as elapsed time; dates come with the programme. */
 @Component({
@@ -35,6 +36,7 @@ import { WoodMoisture } from './wood-moisture';
     ReasonPanel,
     RouterLink,
     WoodMoisture,
+    ZoneTimes,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   host: { '[class.dated]': 'isProgramme()' },

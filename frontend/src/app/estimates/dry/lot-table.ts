@@ -1,10 +1,11 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, model } from '@angular/core';
-import { dayLength_minutes, dayOf } from '#shared/drying/day-length-minutes';
+import { dayOf } from '#shared/drying/day-length-minutes';
 import { Formats } from '../../core/formats/formats';
 import type { FigureColumn } from '../../ui/table/figure-column';
 import { FigureTable } from '../../ui/table/figure-table';
 import { smallScreen } from '../../ui/screen/small-screen';
 import type { ShownLot } from './dry-lots';
+import { waitingText } from './waiting-text';
 
 /** The lots with their hands-on and waiting time, and on which days they are in work. */
 @Component({
@@ -78,9 +79,7 @@ export class LotTable {
   }
 
   private waiting(minutes: number): string {
-    // Of a wait of days nobody asks the minutes.
-    const whole = minutes < dayLength_minutes ? minutes : Math.round(minutes / 60) * 60;
-    return this.formats.figure('minutes', whole);
+    return waitingText(this.formats, minutes);
   }
 
   private hours(minutes: number): string {

@@ -11,13 +11,14 @@ import { MemberZones } from './member-zones';
 import { WholeGilding } from './whole-gilding';
 import { ZoneColumns } from './zone-columns';
 import { ZoneSection } from './zone-section';
+import { ZonesAside } from './zones-aside';
 
 /** Gild: the zones of the selected member with their leaf and their build-up, or the leaf of the whole job. */
 @Component({
   selector: 'app-gild-page',
   imports: [FindingList, MemberGilding, MemberPlace, WholeGilding, ZoneSection],
   changeDetection: ChangeDetectionStrategy.OnPush,
-  providers: [PlaceExplanation, MemberZones],
+  providers: [PlaceExplanation, MemberZones, ZonesAside],
   template: `
     <app-member-place>
       @if (selection.shown(); as member) {

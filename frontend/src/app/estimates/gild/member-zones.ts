@@ -11,6 +11,7 @@ import { newZone } from '../measuring/new-zone';
 import { memberForm } from '../members/member-form';
 import { MemberSelection } from '../members/member-selection';
 import type { ZoneRow } from './zone-row';
+import { ZonesAside } from './zones-aside';
 
 /** The zones of the selected member: what was entered, what it comes to, and what one does with them. */
 @Injectable()
@@ -18,6 +19,7 @@ export class MemberZones {
   private readonly store = inject(EstimateStore);
   private readonly formats = inject(Formats);
   private readonly selection = inject(MemberSelection);
+  private readonly aside = inject(ZonesAside);
   private readonly asked = signal<string | undefined>(undefined);
 
   readonly form = memberForm();
@@ -26,8 +28,10 @@ export class MemberZones {
   );
   readonly rows = computed<readonly ZoneRow[]>(() =>
     (this.form.value<readonly Zone[]>('zones') ?? []).map((zone, index) => {
-      const worked = this.store.figures()?.zones.find(({ zoneId }) => zoneId === zone.id);
-      return { zone, path: `zones.${index}`, worked, leaf_minor: this.leaf_minor(worked) };
+      const inSum = this.store.figures()?.zones.find(({ zoneId }) => zoneId === zone.id);
+      const isAside = !inSum && zone.alternativeId !== null;
+      const worked = isAside ? this.aside.of(zone) : inSum;
+      return { zone, path: `zones.${index}`, worked, isAside, leaf_minor: this.leaf_minor(worked) };
     }),
   );
   /** The one that is open: the one chosen, else the first. */

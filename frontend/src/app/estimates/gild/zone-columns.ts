@@ -49,7 +49,8 @@ export class ZoneColumns {
   }
 
   /** The bottom line of a member. */
-  totals(name: string, rows: readonly ZoneRow[]): Record<string, string> {
+  totals(name: string, all: readonly ZoneRow[]): Record<string, string> {
+    const rows = all.filter(({ isAside }) => !isAside);
     const sum = (pick: (row: ZoneRow) => number) => rows.reduce((total, row) => total + pick(row), 0);
     const leaves = sum(({ worked }) => worked?.leaf?.grossLeaves.likely ?? 0);
     return {
@@ -78,7 +79,7 @@ export class ZoneColumns {
       key: 'laid',
       heading: $localize`Laid as`,
       kind: 'chip',
-      text: ({ worked }) => (worked?.leaf ? laidAs(worked.leaf) : $localize`no leaf`),
+      text: ({ worked }) => (worked ? (worked.leaf ? laidAs(worked.leaf) : $localize`no leaf`) : '–'),
     };
   }
 
@@ -121,8 +122,11 @@ export class ZoneColumns {
     return [buildUpName(row, store), laid, area, this.alternative(row, store)].filter(Boolean).join(' · ');
   }
 
-  private alternative({ zone }: ZoneRow, store: EstimateStore): string {
+  private alternative({ zone, isAside }: ZoneRow, store: EstimateStore): string {
     const name = store.settings()?.alternatives.find(({ id }) => id === zone.alternativeId)?.name;
-    return name ? $localize`in “${name}:alternative:”` : '';
+    if (!name) return '';
+    return isAside
+      ? $localize`in “${name}:alternative:”, figures with that choice, in no sum`
+      : $localize`in “${name}:alternative:”`;
   }
 }

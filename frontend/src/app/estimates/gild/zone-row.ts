@@ -5,8 +5,10 @@ import type { Zone } from '#shared/estimates/member';
 export interface ZoneRow {
   readonly zone: Zone;
   readonly path: string;
-  /** Undefined where it belongs to an alternative that is not chosen. */
+  /** With its alternative taken where that is not chosen; undefined where nothing could be worked. */
   readonly worked: ZoneFigures | undefined;
+  /** It belongs to an alternative that is not chosen, so it is in no sum. */
+  readonly isAside: boolean;
   /** Its leaf at the list price; null where nobody may know, or no leaf is laid. */
   readonly leaf_minor: number | null;
 }

@@ -65,6 +65,7 @@ export class ZoneList {
         control,
         path: `zones.${index}`,
         zone: zones[index],
+        alternative: this.alternativeOf(zones[index]),
         worked: this.worked(zones[index]),
       }));
   });
@@ -125,6 +126,13 @@ export class ZoneList {
 
   protected takeParts(path: string, parts: readonly string[]): void {
     this.form().put(`${path}.take`, { way: 'parts', parts });
+  }
+
+  /** The alternative it belongs to; its share is not added to that of the others. */
+  private alternativeOf(zone: Zone | undefined): string {
+    const id = zone?.alternativeId ?? null;
+    const name = this.store.settings()?.alternatives.find((one) => one.id === id)?.name;
+    return name ? $localize`in “${name}:alternative:”` : '';
   }
 
   private worked(zone: Zone | undefined): { text: string; explained: Explained } | undefined {

@@ -10,6 +10,7 @@ import {
 } from '@angular/material/dialog';
 import { firstValueFrom } from 'rxjs';
 import type { Shape, ShapeKind } from '#shared/measure/shape';
+import { Formats } from '../../core/formats/formats';
 import { firstShape, ShapeCards, shapeNames } from '../../measure';
 
 /** Asks which shape a new member has. */
@@ -37,5 +38,5 @@ export class ShapeDialog {
 export async function askForShape(injector: Injector): Promise<{ shape: Shape; name: string } | undefined> {
   const asked = injector.get(MatDialog).open<ShapeDialog, undefined, ShapeKind>(ShapeDialog, { width: '760px' });
   const kind = await firstValueFrom(asked.afterClosed());
-  return kind && { shape: firstShape(kind), name: shapeNames[kind] };
+  return kind && { shape: firstShape(kind, injector.get(Formats).lengthUnit()), name: shapeNames[kind] };
 }
