@@ -107,7 +107,7 @@ describe('an instant and a locale', () => {
   });
 
   it('is written in the order of the locale', () => {
-    expect(formatDay('2026-03-05', 'en-GB')).toBe('5 March 2026');
-    expect(formatDay('2026-03-05', 'de-DE', 'short')).toBe('05.03.2026');
+    expect(formatDay('2026-03-05', 'en-GB')).toBe('5 Mar 2026');
+    expect(formatDay('2027-01-30', 'de-DE')).toBe('30. Jan. 2027');
   });
 });

@@ -13,6 +13,7 @@ export const clientIssueSummarySchema = z.strictObject({
   issuedOn: z.string(),
   validUntil: z.string(),
   gross_minor: z.int(),
+  currency: z.string(),
 });
 
 /** An invoice in a list, with what is still owed on it. */

@@ -1,7 +1,9 @@
 import { chosenDraft } from '#shared/estimates/chosen-draft';
 import type { Choice, Draft } from '#shared/estimates/draft';
 import { estimateWork, type EstimateWork } from '#shared/estimates/estimate-work';
+import { emptyAlternatives, startPrices } from '#shared/estimates/draft-findings';
 import type { CostFigures, Figures, PurchaseFigures } from '#shared/estimates/figures';
+import { agreedSum } from '#shared/estimates/price/agreed-sum';
 import { directCost } from '#shared/estimates/price/direct-cost';
 import { priceOf } from '#shared/estimates/price/price-of';
 import type { Price } from '#shared/estimates/price/price';
@@ -40,19 +42,26 @@ type ContingencyChoice = NonNullable<EstimateSettings['contingency']>;
 const contingencyOf = (settings: EstimateSettings, card: RateCard): ContingencyChoice =>
   settings.contingency ?? card.money.contingency;
 
+/** The profit lines are worked with; under a lump sum they are weighed by the card's. */
+function profitOf({ profit }: EstimateSettings, card: RateCard): Pick<PriceInput, 'profit' | 'lumpSum'> {
+  if (profit?.way === 'lump-sum') return { profit: card.money.profit, lumpSum: profit.amount };
+  return { profit: profit ?? card.money.profit, lumpSum: null };
+}
+
 function priceInput(at: Omit<PreparedEstimate, 'risk' | 'needsRisk'>, contingency: PriceContingency): PriceInput {
   const { card, currency } = at.input;
   const { settings } = at.draft;
   return {
     digits: currencyDigits(currency),
     card: card.money,
-    profit: settings.profit ?? card.money.profit,
+    ...profitOf(settings, card),
     contingency,
     discount: settings.discount,
     taxCategoryId: settings.taxCategoryId,
     labour: at.work.labour,
     goods: at.work.goods,
     extras: settings.extras,
+    memberIds: at.draft.members.map(({ id }) => id),
   };
 }
 
@@ -95,7 +104,11 @@ export function prepareEstimate(input: EstimateInput): PreparedEstimate {
 export function pricedFrom(prepared: PreparedEstimate, risk: Risk | null): PriceInput {
   const { way, percent } = contingencyOf(prepared.draft.settings, prepared.input.card);
   const fromRisk = { way: 'risk' as const, amount_minor: risk?.contingency_minor ?? 0 };
-  return priceInput(prepared, way === 'share' ? { way, percent } : fromRisk);
+  const input = priceInput(prepared, way === 'share' ? { way, percent } : fromRisk);
+  const { choice } = prepared.input;
+  if (!input.lumpSum || choice.length === 0) return input;
+  const base = priceInput(prepareEstimate({ ...prepared.input, choice: [] }), input.contingency);
+  return { ...input, lumpSum: agreedSum(input.lumpSum, input, base) };
 }
 
 function purchases({ leaf, goods }: EstimateWork): PurchaseFigures[] {
@@ -105,14 +118,14 @@ function purchases({ leaf, goods }: EstimateWork): PurchaseFigures[] {
   }));
 }
 
-const costFigures = (work: EstimateWork, price: Price, risk: Risk | null): CostFigures => ({
+const costFigures = ({ work, input }: PreparedEstimate, price: Price, risk: Risk | null): CostFigures => ({
   price: price.cost,
   purchases: purchases(work),
   strips: work.zones.flatMap(({ zone, leaf }) =>
     leaf?.laying?.way === 'lays' ? [{ zoneId: zone.id, options: leaf.laying.options }] : [],
   ),
   risk,
-  findings: price.findings,
+  findings: [...price.findings, ...startPrices(input)],
 });
 
 /** All figures of a prepared estimate: money in whole minor units, stages of the gross price. Without risk, a contingency from risk is 0. */
@@ -121,10 +134,12 @@ export function estimateFigures(prepared: PreparedEstimate, risk: Risk | null): 
   const price = priceOf(pricedFrom(prepared, risk));
   const { deposit_percent, parts, retention_percent } = draft.settings.stages;
   const stages_percent = parts.length > 0 ? parts.map((part) => part.percent) : [100];
+  const worked = workFigures(work, draft.settings, input.card);
   return {
-    ...workFigures(work, draft.settings, input.card),
+    ...worked,
+    findings: [...worked.findings, ...emptyAlternatives(input)],
     price: price.client,
     stages: stagePayments(price.client.gross_minor, { deposit_percent, stages_percent, retention_percent }),
-    cost: costFigures(work, price, risk),
+    cost: costFigures(prepared, price, risk),
   };
 }

@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { isAsMeasured, measuredWorkSchema } from '#shared/estimates/measured-work-schema';
 import type { EstimateSettings, ExtraLine } from '#shared/estimates/settings';
 import { cumulativePercents } from '#shared/money/cumulative-parts';
 import { complain } from '#shared/problems/complaints-of';
@@ -39,24 +40,29 @@ export const extraLineSchema = z.discriminatedUnion('kind', [
     price_per_dm3: decimalEntry,
     waste_percent: z.number().min(0).max(900),
   }),
-  z.strictObject({
-    ...anyExtra,
-    kind: z.literal('paid-quantity'),
-    rule: line(200),
-    quantity: decimalEntry,
-    unit: line(20),
-    price: decimalEntry,
-  }),
+  z
+    .strictObject({
+      ...anyExtra,
+      kind: z.literal('paid-quantity'),
+      rule: line(200),
+      quantity: decimalEntry,
+      unit: line(20),
+      price: decimalEntry,
+      measured: measuredWorkSchema.optional(),
+    })
+    .refine(isAsMeasured, { ...complain('paid-quantity-differs'), path: ['quantity'] }),
   z.strictObject({ ...anyExtra, kind: z.literal('insurance'), percent: percentText, value: decimalEntry.nullable() }),
   z.strictObject({ ...anyExtra, kind: z.literal('price'), price: signedDecimal }),
 ]) satisfies z.ZodType<ExtraLine>;
 
-const profitSchema = z
-  .strictObject({ way: z.enum(['margin', 'mark-up']), percent: decimalEntry })
-  .refine((profit) => profit.way === 'mark-up' || Number(profit.percent) < 100, {
+const profitSchema = z.discriminatedUnion('way', [
+  z.strictObject({ way: z.literal('margin'), percent: decimalEntry }).refine(({ percent }) => Number(percent) < 100, {
     ...complain('entry-not-below', { maximum: 100 }),
     path: ['percent'],
-  });
+  }),
+  z.strictObject({ way: z.literal('mark-up'), percent: decimalEntry }),
+  z.strictObject({ way: z.literal('lump-sum'), amount: decimalEntry }),
+]);
 
 const discountSchema = z
   .strictObject({ way: z.enum(['percent', 'amount']), amount: decimalEntry })

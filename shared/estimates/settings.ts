@@ -1,5 +1,7 @@
 import type { Climate } from '#shared/drying/climate';
+import type { MeasuredWork } from '#shared/estimates/price/measured-work';
 import type { DecimalText } from '#shared/money/decimal';
+import type { Profit } from '#shared/rate-cards/money-card';
 
 /** One further line of an estimate: work or goods that no member carries. */
 export type ExtraLine = {
@@ -28,6 +30,8 @@ export type ExtraLine = {
       readonly quantity: DecimalText;
       readonly unit: string;
       readonly price: DecimalText;
+      /** What the quantity is reckoned from; absent where it follows a rule of the workshop's own. */
+      readonly measured?: MeasuredWork | undefined;
     }
   | { readonly kind: 'insurance'; readonly percent: DecimalText; readonly value: DecimalText | null }
   | { readonly kind: 'price'; readonly price: DecimalText }
@@ -50,6 +54,9 @@ export interface Stage {
   readonly percent: number;
 }
 
+/** How the price comes of the cost: by margin, by mark-up, or a lump sum agreed before discount and tax. */
+export type EstimateProfit = Profit | { readonly way: 'lump-sum'; readonly amount: DecimalText };
+
 /** What an estimate says as a whole, beside its pieces and members. */
 export interface EstimateSettings {
   readonly title: string;
@@ -60,7 +67,7 @@ export interface EstimateSettings {
   readonly site: Climate;
   readonly presentation: 'members' | 'kinds';
   /** Null follows the rate card. */
-  readonly profit: { readonly way: 'margin' | 'mark-up'; readonly percent: DecimalText } | null;
+  readonly profit: EstimateProfit | null;
   readonly contingency: { readonly way: 'share' | 'risk'; readonly percent: DecimalText } | null;
   readonly discount: { readonly way: 'percent' | 'amount'; readonly amount: DecimalText } | null;
   readonly taxCategoryId: string;

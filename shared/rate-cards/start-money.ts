@@ -2,6 +2,9 @@ import type { MoneyCard } from '#shared/rate-cards/money-card';
 
 const taxed = { percent: '0', exemptionReason: '' };
 
+/** What the prices a workshop starts from are in (ISO 4217), those of leaf and materials as well. */
+export const startCurrency = 'EUR';
+
 /** The money part a workshop starts from: house values in EUR, every one to be changed. Rates of tax are placeholders for the workshop's own. */
 export const startMoney: MoneyCard = {
   grades: [

@@ -1,8 +1,10 @@
+import { D } from '#shared/money/decimal';
 import { textOf } from '#shared/money/text-of';
 import { squareMillimetresPerSquareFoot, squareMillimetresPerSquareInch } from '#shared/units/exact-factors';
 import { lengthFigure } from '#shared/units/format-length';
 import { inMetric } from '#shared/units/metric';
 import type { Pen } from '#shared/units/pen';
+import { trueMinus } from '#shared/units/true-minus';
 
 type Write = (figure: number) => string;
 
@@ -11,12 +13,19 @@ function moneyWriter({ settings: { locale, currency, digits } }: Pen): Write {
   const format = new Intl.NumberFormat(locale, { style: 'currency', currency, numberingSystem: 'latn', ...decimals });
   // A decimal text is formatted digit by digit; as a number, sums above 45 million million minor units could lose one.
   const exact = (amount: number) => format.format(textOf(amount, digits) as unknown as number);
-  return (figure) => (Number.isSafeInteger(figure) ? exact(figure) : format.format(figure / 10 ** digits));
+  return (figure) => trueMinus(Number.isSafeInteger(figure) ? exact(figure) : format.format(figure / 10 ** digits));
+}
+
+/** What an hour costs, in minor units, with every decimal it has: rounded, hours × rate would not come to the cost beside it. */
+function rateWriter({ settings: { locale, currency, digits } }: Pen): Write {
+  const decimals = { minimumFractionDigits: digits, maximumFractionDigits: digits + 6 };
+  const format = new Intl.NumberFormat(locale, { style: 'currency', currency, numberingSystem: 'latn', ...decimals });
+  return (figure) => trueMinus(format.format(new D(figure).div(10 ** digits).toFixed() as unknown as number));
 }
 
 function percentWriter({ settings: { locale } }: Pen): Write {
   const format = new Intl.NumberFormat(locale, { style: 'percent', maximumFractionDigits: 2, numberingSystem: 'latn' });
-  return (figure) => format.format(figure / 100);
+  return (figure) => trueMinus(format.format(figure / 100));
 }
 
 /** Minutes as days, hours and minutes, leaving out what is nought: 45 min, 2 d 4 h. */
@@ -75,6 +84,7 @@ export function figureWriters(pen: Pen): Readonly<Record<string, Write>> {
     mm: lengthWriter(pen),
     mm2: settings.lengthUnit === 'in' ? imperialArea(pen) : metricArea(pen),
     minor: moneyWriter(pen),
+    rate_minor: rateWriter(pen),
     percent: percentWriter(pen),
     hours: (figure) => worded('unit-hours', figure, 2),
     minutes: durationWriter(pen),

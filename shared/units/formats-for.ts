@@ -3,7 +3,7 @@ import { penFor, type ReaderSettings } from '#shared/units/pen';
 import type { ValueFormats } from '#shared/words/say';
 
 /**
- * How figures are written for a reader, by the ending of a value's name: mm, mm2, minor, hours, minutes, days, percent, celsius, µm, grams,
+ * How figures are written for a reader, by the ending of a value's name: mm, mm2, minor, rate_minor, hours, minutes, days, percent, celsius, µm, grams,
  * litres, leaves, booklets, packs, pieces, factor, divisor; any other ending is a plain number. Decimals of money never come from Intl.
  */
 export function formatsFor(settings: ReaderSettings): ValueFormats {

@@ -1,4 +1,5 @@
 import type { LengthUnit } from '#shared/units/length-unit';
+import { trueMinus } from '#shared/units/true-minus';
 import { en } from '#shared/words/en';
 import { say } from '#shared/words/say';
 import type { Catalogue, WordCode } from '#shared/words/word-code';
@@ -37,7 +38,7 @@ function numberWriter(locale: string): Pen['number'] {
     const decimals = { minimumFractionDigits: least, maximumFractionDigits: most };
     const format = known.get(key) ?? new Intl.NumberFormat(locale, { ...decimals, numberingSystem: 'latn' });
     known.set(key, format);
-    return format.format(figure + 0);
+    return trueMinus(format.format(figure + 0));
   };
 }
 

@@ -19,7 +19,8 @@ function messageFor(text: string, locale: string): IntlMessageFormat {
   return made;
 }
 
-const unitOf = (name: string): string | undefined => /_([a-zµ0-9]+)$/.exec(name)?.[1];
+/** A rate is money that keeps its decimals, so `rate_minor` is a unit by itself. */
+const unitOf = (name: string): string | undefined => (name === 'rate_minor' ? name : /_([a-zµ0-9]+)$/.exec(name)?.[1]);
 
 function written(values: WordValues, formats: ValueFormats): Record<string, string | number> {
   const out: Record<string, string | number> = {};
@@ -27,7 +28,7 @@ function written(values: WordValues, formats: ValueFormats): Record<string, stri
     const unit = unitOf(name);
     out[name] = typeof value === 'number' && unit ? formats.write(unit, value) : value;
     // A message for limits of every kind says `{maximum}`; the unit comes with the value.
-    if (unit) out[name.slice(0, -unit.length - 1)] ??= out[name];
+    if (unit && unit !== name) out[name.slice(0, -unit.length - 1)] ??= out[name];
   }
   return out;
 }

@@ -1,4 +1,4 @@
-import { paidQuantity } from '#shared/estimates/price/paid-quantity';
+import { paidFor, paidText } from '#shared/estimates/price/measured-work';
 import type { PriceInput } from '#shared/estimates/price/price-input';
 import { priceOf } from '#shared/estimates/price/price-of';
 import { inverseDistribution } from '#shared/estimates/risk/inverse-distribution';
@@ -46,6 +46,7 @@ describe('overhead by the direct hour', () => {
       contingency: { way: 'share', percent: '0' },
       discount: null,
       taxCategoryId: 'none',
+      memberIds: [],
       labour: [{ memberId: null, kind: 'carving', gradeId: 'hand', hours: 100 }],
       goods: [{ head: 'materials', itemId: 'sundry', name: 'Sundry', cost: '800', shares: [] }],
       extras: [],
@@ -312,36 +313,20 @@ describe('three-point figures', () => {
   });
 });
 
-describe('measuring rules', () => {
+describe('work paid by a measuring rule', () => {
+  const feet = (figure: number) => ({ text: `${figure} ft`, mm: figure * 304.8 });
+  const nothing = { length: null, girth: null, area: null, sides: 1, worth: 1 } as const;
+
   // A Key to Civil Architecture, 1774: four lengths of 12 ft × 3 in girth at 4 d a square foot.
-  it('pays 12 square feet, 48 pence, for four lengths of 12 ft at 3 in girth', () => {
-    const square = paidQuantity({ rule: 'as-measured', quantity: new D(4 * 12).times(3).div(12).toString() });
-    expect(square.toNumber()).toBe(12);
-    expect(square.times(4).toNumber()).toBe(48);
+  it('comes to 48 pence for four lengths of 12 ft at 3 in girth', () => {
+    const paid = paidFor({ ...nothing, rule: 'plain-area', length: feet(48), girth: feet(0.25) });
+    expect(paid && lineAmount({ quantity: paidText(paid, 'ft²'), price: '4' }, 0)).toBe(48);
   });
 
-  // IS 1200 Part 15: carved work is measured × 2.00 each side.
-  it('pays carved work twice, each side', () => {
-    expect(paidQuantity({ rule: 'carved-double', quantity: '3.5', sides: 1 }).toNumber()).toBe(7);
-    expect(paidQuantity({ rule: 'carved-double', quantity: '3.5', sides: 2 }).toNumber()).toBe(14);
-  });
-
-  // An Old Hand, Hints for Painters.
-  it.each([
-    ['4.5', '120', 5],
-    ['6', '120', 10],
-    ['11.9', '120', 10],
-    ['12', '120', 10],
-    ['15', '120', 12.5],
-    ['0', '120', 0],
-  ])('pays a member of %s in girth and %s in run as %d square feet', (girth_inches, run_inches, expected) => {
-    expect(paidQuantity({ rule: 'girth-in-steps', girth_inches, run_inches }).toNumber()).toBe(expected);
-  });
-
-  // White: 600 yd plain and 300 yd special at 0.20; 60 yd worth three times plain add 120 yd.
-  it('pays special work as so many times the plain', () => {
-    const yards = paidQuantity({ rule: 'times-plain', quantity: '300', times: '1' }).plus(600);
-    expect(lineAmount({ quantity: yards.toString(), price: '0.20' }, 2)).toBe(180_00);
-    expect(paidQuantity({ rule: 'times-plain', quantity: '60', times: '3' }).minus(60).toNumber()).toBe(120);
+  // White: 60 yd worth three times plain are paid as 180 yd; at 0.20 a yard that is 36.00.
+  it('comes to three times the rate for special work worth three times the plain', () => {
+    const paid = paidFor({ ...nothing, rule: 'weighted', area: { text: 'as measured', mm2: 60 * 9 * 92_903.04 }, worth: 3 });
+    const yards = Number(paid && paidText(paid, 'ft²')) / 9;
+    expect(lineAmount({ quantity: String(yards), price: '0.20' }, 2)).toBe(36_00);
   });
 });

@@ -100,6 +100,15 @@ const cases: readonly (readonly [string, Draft, Parameters<typeof sampleSnapshot
     smallDraft(),
     { card: { ...startCard, buildUps: { ...startCard.buildUps, buying: 'pro-rata' } } },
   ],
+  ['of a lump sum', smallDraft({ profit: { way: 'lump-sum', amount: '9876.54' } }), {}],
+  [
+    'of a lump sum with a contingency from risk and a discount',
+    smallDraft({
+      ...{ profit: { way: 'lump-sum', amount: '12000' }, contingency: { way: 'risk', percent: '0' } },
+      discount: { way: 'percent', amount: '3.5' },
+    }),
+    {},
+  ],
   ['in a currency without minor units', smallDraft(), { workshop: { currency: 'JPY' } }],
   ['in a currency of a thousand minor units', smallDraft(), { workshop: { currency: 'KWD' } }],
   ['of twelve members in three build-ups', longDraft(12), {}],

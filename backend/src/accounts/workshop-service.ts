@@ -40,7 +40,14 @@ const letterhead = { longest_pixels: 1_200, as: 'png' } as const;
 export class WorkshopService {
   private readonly whenFounded: ((by: Doer) => Promise<void>)[] = [];
 
+  private readonly whenCurrencyChanged: ((by: Actor, currency: string) => Promise<void>)[] = [];
+
   constructor(private readonly parts: Parts) {}
+
+  /** What a later feature does where the workshop takes another currency, in the same transaction: it refuses, or carries its own over. */
+  followCurrency(work: (by: Actor, currency: string) => Promise<void>): void {
+    this.whenCurrencyChanged.push(work);
+  }
 
   /** What a later feature brings to a new workshop, in the transaction that founds it. */
   bringAlong(work: (by: Doer) => Promise<void>): void {
@@ -73,6 +80,8 @@ export class WorkshopService {
     const before = await this.parts.workshops.get(actor.workshopId);
     const after = await this.parts.workshops.change(actor.workshopId, version, settings);
     await this.record(actor, 'history-workshop-changed', { before, after });
+    if (before.currency !== after.currency)
+      for (const work of this.whenCurrencyChanged) await work(actor, after.currency);
     return after;
   }
 

@@ -10,11 +10,8 @@ export interface LetterFigures {
   readonly day: (day: string) => string;
 }
 
-/** Letters are worded in English; a workshop that writes English keeps its own kind of it. */
-const languageOf = (locale: string): string => (/^en\b/i.test(locale) ? locale : 'en-GB');
-
 export const letterFigures = ({ locale, lengthUnit }: WorkshopSettingsRow): LetterFigures => ({
   money: (amount_minor, currency) =>
     formatsFor({ locale, currency, lengthUnit, digits: currencyDigits(currency) }).write('minor', amount_minor),
-  day: (day) => formatDay(day, languageOf(locale)),
+  day: (day) => formatDay(day, locale),
 });

@@ -3,6 +3,7 @@ import { buildUpsUsed } from '#shared/documents/buildups-used';
 import { careCodes } from '#shared/documents/care-codes';
 import { clientCautions } from '#shared/documents/client-cautions';
 import type { Figures } from '#shared/estimates/figures';
+import { isEmptyAlternative } from '#shared/estimates/is-empty-alternative';
 import type { Snapshot } from '#shared/estimates/snapshot';
 import { presentBuildUp, presentClientAlternative } from './client-alternatives-presenter';
 import { presentClientPieces } from './client-pieces-presenter';
@@ -47,9 +48,9 @@ export function presentClientFrozen(snapshot: Snapshot, alternatives: ReadonlyMa
     pieces: presentClientPieces(snapshot, alternatives),
     buildUps: buildUpsUsed(figures.zones).map(presentBuildUp),
     price: presentClientPrice(snapshot),
-    alternatives: draft.settings.alternatives.map((one) =>
-      presentClientAlternative(snapshot, one, alternatives.get(one.id)),
-    ),
+    alternatives: draft.settings.alternatives
+      .filter(({ id }) => !isEmptyAlternative(snapshot.draft, id))
+      .map((one) => presentClientAlternative(snapshot, one, alternatives.get(one.id))),
     programme: programmeOf(snapshot),
     isDrying: figures.dry.lots.some((lot) => lot.drying_minutes > 0),
     cautions: clientCautions({ findings: figures.findings, isRestoration: draft.settings.restoration }),

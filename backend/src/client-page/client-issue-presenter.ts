@@ -37,6 +37,7 @@ export function presentClientSummary(
     issuedOn: dayOfInstant(row.issuedAt.getTime(), at.timeZone),
     validUntil: row.validUntil,
     gross_minor: row.grossMinor,
+    currency: estimate.currency,
   };
 }
 
@@ -57,7 +58,7 @@ export function presentClientIssue(facts: ClientIssueFacts): ClientIssue {
   const summary = presentClientSummary(issue, { today, timeZone: workshop.timeZone });
   const ofEstimate = all.filter(({ estimate }) => estimate.id === issue.estimate.id);
   return {
-    letterhead: presentClientLetterhead(workshop),
+    letterhead: presentClientLetterhead(workshop, snapshot.workshop.currency),
     issue: summary,
     replacedBy: row.state === 'replaced' ? (ofEstimate[0]?.row.id ?? null) : null,
     job: { id: job.id, ...snapshot.job },

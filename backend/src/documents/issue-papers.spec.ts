@@ -135,7 +135,7 @@ describe('the estimate as a paper', () => {
     expect(text).toContain('3.5 m, by the rule: as measured');
     const [alternative] = full.alternatives;
     expect(alternative.difference_minor).toBeLessThan(0);
-    expect(text).toContain(`${money(alternative.gross_minor)} − ${money(-alternative.difference_minor)}`);
+    expect(text).toContain(`${money(alternative.gross_minor)} −${money(-alternative.difference_minor)}`);
   });
 
   it.each(['members', 'kinds'] as const)('comes by %s to sections that sum to the lines', async (presentation) => {
@@ -175,7 +175,7 @@ describe('the estimate as a paper', () => {
     expect(text).toContain('has to be checked by a structural engineer');
     expect(text).toContain('Follow local codes and the product’s safety data sheet; ask a licensed professional.');
     expect(text).toMatch(/About \d+ weeks from the start of work/);
-    expect(text).toContain('This estimate holds until 1 May 2026. Prices of leaf hold until 1 April 2026.');
+    expect(text).toContain('This estimate holds until 1 May 2026. Prices of leaf hold until 1 Apr 2026.');
     expect(text).toContain('section, 1 : 2');
   });
 

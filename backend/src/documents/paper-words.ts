@@ -5,6 +5,7 @@ import type { MinorUnits } from '#shared/money/decimal';
 import { formatsFor } from '#shared/units/formats-for';
 import { en } from '#shared/words/en';
 import { say } from '#shared/words/say';
+import { unprintedLetters } from '#shared/words/unprinted-letters';
 import type { WordCode, WordValues } from '#shared/words/word-code';
 
 /** What a paper is worded with: the codes of the catalogue, and figures as the workshop writes them. */
@@ -22,6 +23,12 @@ export interface PaperWords {
 /** Papers are worded in the one language there is; a workshop that writes English keeps its own kind of it. */
 const languageOf = (locale: string): string => (/^en\b/i.test(locale) ? locale : 'en-GB');
 
+/** A day as the workshop's pages show it, unless the fonts of the papers lack a letter of it. */
+function printedDay(day: string, locale: string): string {
+  const written = formatDay(day, locale);
+  return unprintedLetters(written).length === 0 ? written : formatDay(day, languageOf(locale));
+}
+
 /** The words of a workshop's papers. */
 export function paperWords(workshop: SnapshotWorkshop): PaperWords {
   const { locale, currency, lengthUnit } = workshop;
@@ -33,6 +40,6 @@ export function paperWords(workshop: SnapshotWorkshop): PaperWords {
     money: (amount_minor) => formats.write('minor', amount_minor),
     length: (length_mm) => formats.write('mm', length_mm),
     figure: (unit, figure) => formats.write(unit, figure),
-    day: (day) => formatDay(day, language),
+    day: (day) => printedDay(day, workshop.locale),
   };
 }

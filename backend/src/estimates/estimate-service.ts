@@ -7,6 +7,7 @@ import type { Choice, Draft } from '#shared/estimates/draft';
 import { draftInOrder } from '#shared/estimates/draft-in-order';
 import type { AlternativeTotal, CostedEstimate, EstimateKind, KeptChanges } from '#shared/estimates/estimate-schema';
 import type { Figures } from '#shared/estimates/figures';
+import { isEmptyAlternative } from '#shared/estimates/is-empty-alternative';
 import { startSettings } from '#shared/estimates/start-settings';
 import { Rejection } from '#shared/problems/rejection';
 import type { RateCard } from '#shared/rate-cards/rate-card';
@@ -120,9 +121,10 @@ export class EstimateService {
     return this.parts.risks.figures(inputOf(whole, await this.cardOf(whole)));
   }
 
-  /** Each alternative worked by itself, and its difference to the base. */
+  /** Each alternative that says anything worked by itself, and its difference to the base. */
   async alternatives(whole: WholeEstimate): Promise<AlternativeTotal[]> {
-    const { alternatives } = whole.estimate.settings;
+    const draft = this.draft(whole);
+    const alternatives = draft.settings.alternatives.filter(({ id }) => !isEmptyAlternative(draft, id));
     if (alternatives.length === 0) return [];
     const card = await this.cardOf(whole);
     const gross = async (choice: Choice) =>
@@ -186,6 +188,20 @@ export class EstimateService {
     });
     const { whole, figures } = await this.refresh(workshopId, at.id);
     return presentEstimate(whole, figures, 'cost') as CostedEstimate;
+  }
+
+  /** Works a draft in another currency from now on: every price in it stays the number it is, and the card says whether it was meant so. */
+  async carryOver(actor: Actor, id: string, currency: string): Promise<void> {
+    const { workshopId, version } = await this.parts.estimates.lock(actor.workshopId, id);
+    const changedAt = this.parts.clock.now();
+    const row = await this.parts.estimates.change(workshopId, { id, version }, { currency, changedAt });
+    await this.parts.audit.record(actor, {
+      subject: { kind: 'estimate', id },
+      jobId: row.jobId,
+      code: 'history-estimate-currency',
+      values: { number: row.number, currency },
+    });
+    await this.refresh(workshopId, id);
   }
 
   /** An issue raises the draft's version too, so that what was seen once is issued once. */

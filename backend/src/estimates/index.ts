@@ -9,6 +9,7 @@ import type { CardEffects, RateCards } from '../rate-cards';
 import { cardEffects } from './card-effects';
 import { ChangeService } from './change-service';
 import { memberRepository, pieceRepository } from './content-repository';
+import { currencyChange } from './currency-change';
 import { EstimateRepository } from './estimate-repository';
 import { estimateRoutes } from './estimate-routes';
 import { EstimateService } from './estimate-service';
@@ -68,6 +69,7 @@ export function openEstimates({ database, clock, files }: Platform, needs: Estim
   const presences = new PresenceRepository(database);
   const drafts = new EstimateService({ ...parts, presences, readings, changes: new ChangeService(parts) });
   const kept = { ...parts, drafts, issues: new IssueRepository(database), files, papers: needs.papers };
+  needs.accounts.workshops.followCurrency(currencyChange(kept));
   const issues = new IssueService({ ...kept, programme: needs.programme });
   const presence = new PresenceService({ ...parts, presences });
   const effects = cardEffects({ drafts, jobs: needs.jobs, cards: needs.rateCards.service, risks: parts.risks });

@@ -28,6 +28,10 @@ export class IssueRepository {
     return row;
   }
 
+  async isAny(workshopId: string): Promise<boolean> {
+    return (await this.issues.list(workshopId, { limit: 1 })).length > 0;
+  }
+
   get(workshopId: string, id: string): Promise<IssueRow> {
     return this.issues.get(workshopId, id);
   }

@@ -57,7 +57,8 @@ export function snapshotOf(freezing: Freezing): Snapshot {
   return {
     snapshotVersion: 1,
     calculatorVersion,
-    workshop: snapshotWorkshop(workshop),
+    // The figures are the estimate's, and so is the currency everything of them is written in.
+    workshop: { ...snapshotWorkshop(workshop), currency: estimate.currency },
     client,
     job,
     estimate: { id: estimate.id, number: estimate.number, letter },

@@ -9,6 +9,7 @@ import type { Platform } from '../platform/platform';
 import { CheckoutEntering } from './checkout-entering';
 import { CheckoutRepository } from './checkout-repository';
 import { CheckoutService } from './checkout-service';
+import { currencyMayChange } from './currency-policy';
 import { DraftService } from './draft-service';
 import { InvoiceLetters } from './invoice-letters';
 import { InvoiceNumbers } from './invoice-numbers';
@@ -77,6 +78,7 @@ function partsOf({ config, database, clock, files }: Platform, needs: InvoicesNe
 export function openInvoices(platform: Platform, needs: InvoicesNeeds): Invoices {
   const { database, cards } = platform;
   const parts = partsOf(platform, needs);
+  parts.workshops.followCurrency(currencyMayChange(parts));
   const drafts = new DraftService(parts);
   const settling = new SettlingService(parts);
   const stages = new StageService({ ...parts, drafts, days: new StageDayRepository(database) });

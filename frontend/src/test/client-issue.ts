@@ -82,7 +82,7 @@ export function clientIssue(given: Partial<ClientIssue> = {}): ClientIssue {
     letterhead: workshop,
     issue: {
       ...{ id: ids.issue, kind: 'estimate', number: '2026-014', letter: 'B', title: 'Pier table', state: 'open' },
-      ...{ issuedOn: '2026-03-02', validUntil: '2026-04-30', gross_minor: 6_150_00 },
+      ...{ issuedOn: '2026-03-02', validUntil: '2026-04-30', gross_minor: 6_150_00, currency: 'EUR' },
     },
     replacedBy: null,
     addressee: { name: 'Helena Marsh', contact: '', address: '' },

@@ -115,6 +115,7 @@ export class EstimateServer implements Pick<EstimateClient, Served> {
   });
   settingsVersion = 1;
   version = 1;
+  currency = 'EUR';
   rateCardId: string = ids.card;
   totals: readonly AlternativeTotal[] = [];
   /** Every list of changes that arrived. */
@@ -136,7 +137,7 @@ export class EstimateServer implements Pick<EstimateClient, Served> {
         number: '12-1',
         version: this.version,
         rateCardId: this.rateCardId,
-        currency: 'EUR',
+        currency: this.currency,
         pieces: this.pieces,
         members: this.members,
         settings: this.settings,
@@ -194,7 +195,7 @@ export class EstimateServer implements Pick<EstimateClient, Served> {
 
   figures(): Figures {
     const draft = draftInOrder(this.settings, this.pieces, this.members);
-    const prepared = prepareEstimate({ draft, choice: [], card: startCard, currency: 'EUR' });
+    const prepared = prepareEstimate({ draft, choice: [], card: startCard, currency: this.currency });
     return this.spoil(estimateFigures(prepared, riskOf(prepared.risk)));
   }
 

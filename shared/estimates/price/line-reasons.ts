@@ -78,13 +78,14 @@ export function profitReason(price: D | number, cost: D | number, { profit }: Pr
 export function lineReasons(line: PricedWork, pricing: Pricing): Reason[] {
   const { work, hours, labour, direct, overhead, contingency, unrounded, price_minor } = line;
   const { input, rates } = pricing;
-  if (work.price_minor !== null) return [minor('price-own', price_minor)];
+  const part = input.lumpSum ? [minor('price-part-of-lump-sum', price_minor)] : [];
+  if (work.price_minor !== null) return [minor('price-own', work.price_minor), ...part];
   const cost = direct.plus(overhead).plus(contingency);
   return [
     ...work.items.map((item) => itemReason(item, pricing)),
     overheadReason(overhead, { hours, labour }, rates),
     contingencyReason(contingency, direct, input),
     profitReason(unrounded, cost, input),
-    minor(input.lumpSum ? 'price-part-of-lump-sum' : 'price-rounded', price_minor),
+    ...(input.lumpSum ? part : [minor('price-rounded', price_minor)]),
   ];
 }

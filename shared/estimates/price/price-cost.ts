@@ -65,8 +65,9 @@ function sumsOf(priced: readonly PricedWork[], pricing: Pricing): Sums {
   return { lines, direct_minor, overhead_minor, contingency_minor, cost_minor: sumMinor(totals) };
 }
 
+/** A share only of what there is: of nothing, or of less than nothing, there is none. */
 const percentOfWhole = (part: number, whole: number): number | null =>
-  whole === 0 ? null : new D(part).div(whole).times(100).toDecimalPlaces(4).toNumber();
+  whole <= 0 ? null : new D(part).div(whole).times(100).toDecimalPlaces(4).toNumber();
 
 /** The workshop's side of priced lines, with what is left of a net price after discount; whole minor units. */
 export function priceCost(priced: readonly PricedWork[], net_minor: MinorUnits, input: PriceInput): PriceCost {

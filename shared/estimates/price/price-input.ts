@@ -43,6 +43,8 @@ export interface PriceInput {
   readonly discount: EstimateSettings['discount'];
   /** Tax category of the worked lines; extra lines bring their own. */
   readonly taxCategoryId: string;
+  /** Members in the order of the estimate, which is the order of their lines; ones not named follow as they first appear. */
+  readonly memberIds: readonly string[];
   readonly labour: readonly PriceLabour[];
   readonly goods: readonly PriceGoods[];
   readonly extras: readonly ExtraLine[];

@@ -29,6 +29,7 @@ const leg: PriceInput = {
   contingency: { way: 'share', percent: '8' },
   discount: null,
   taxCategoryId: 'standard',
+  memberIds: ['leg'],
   labour: [
     { memberId: 'leg', kind: 'carving', gradeId: 'carver', hours: 10 },
     { memberId: 'leg', kind: 'gilding', gradeId: 'gilder', hours: 5 },

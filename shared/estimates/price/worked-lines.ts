@@ -59,11 +59,17 @@ function gathered(input: PriceInput): Gathered[] {
   return [...places.values()];
 }
 
-/** Members as they first appear, what belongs to the job as a whole last; within a member in the order of the work. */
-function inOrder(places: readonly Gathered[]): Gathered[] {
+/** Members in the order of the estimate, what belongs to the job as a whole last; within a member in the order of the work. */
+function inOrder(places: readonly Gathered[], memberIds: readonly string[]): Gathered[] {
+  const placeOf = (memberId: string | null) => {
+    const place = memberIds.indexOf(memberId ?? '');
+    return place < 0 ? memberIds.length : place;
+  };
   const general: readonly Gathered[] = places.filter((place) => place.memberId === null);
   const members = groupedBy(
-    places.filter((place) => place.memberId !== null),
+    places
+      .filter((place) => place.memberId !== null)
+      .toSorted((one, other) => placeOf(one.memberId) - placeOf(other.memberId)),
     (place) => place.memberId,
   );
   const byKind = (one: Gathered, other: Gathered) => workKinds.indexOf(one.kind) - workKinds.indexOf(other.kind);
@@ -73,7 +79,7 @@ function inOrder(places: readonly Gathered[]): Gathered[] {
 /** One line for each kind of work of each member, with what stands behind it; lines with nothing behind them are left out. */
 export function workedLines(input: PriceInput): LineWork[] {
   const rates = priceRates(input);
-  const lines = inOrder(gathered(input)).map((place) => ({
+  const lines = inOrder(gathered(input), input.memberIds).map((place) => ({
     id: idOf(place),
     memberId: place.memberId,
     kind: place.kind,

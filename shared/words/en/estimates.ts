@@ -14,6 +14,19 @@ export const estimates = {
   'issue-decided': 'Issue {letter} was {state} already.',
   'issue-day-early': 'The day lies before the day of issue.',
   'issue-day-late': 'The day lies in the future.',
+  'measuring-rule-plain-area': 'as measured, length by girth',
+  'measuring-rule-carved-each-side': 'carved work counted double, each side',
+  'measuring-rule-narrow-girth': 'narrow members at a girth of 6 or 12 inches',
+  'measuring-rule-weighted': '{worth} times plain work',
+  'paid-quantity-differs': 'The quantity is not what its measures come to.',
+  'alternative-empty':
+    'The alternative “{name}” has nothing in it and leaves nothing out. It stays off the papers until it says what is done otherwise.',
+  'card-start-prices':
+    'The rate card still has the {of, select, hours {rates of hours} other {prices of leaf}} every workshop starts from, which were meant in {start}, and here they are taken as {currency}. Enter your own and put the card in force.',
+  'currency-issued':
+    'Estimates have been issued in the currency there is, and what is issued never changes. For another currency, found another workshop.',
+  'history-estimate-currency':
+    'Estimate {number} was carried over to {currency} with the workshop; its prices stayed the numbers they were',
   'history-estimate-begun': 'Estimate {number} was begun',
   'history-member-made': '{name} was entered',
   'history-member-changed': '{name} was changed',

@@ -111,6 +111,8 @@ export const invoices = {
   'paper-invoice-title': '{kind, select, invoice {Invoice} other {Credit note}} {number}',
   'paper-invoice-subject': '{kind, select, invoice {Invoice} other {Credit note}} for {client}',
   'paper-invoice-corrects': 'Corrects',
+  'currency-invoiced':
+    'There are invoices or payments in the currency there is, and they stay in it. For another currency, found another workshop.',
   'paper-invoice-corrected': 'Invoice {number} of {day}',
   'paper-invoice-due': 'To be paid by',
   'paper-invoice-delivered': 'Delivered',

@@ -42,9 +42,9 @@ describe('the programme of an issue', () => {
   it('stands in the paper with its dates and what they assume, without a word of who works', async () => {
     const text = textOfPaper(await estimatePaper({ ...snapshot, programme }, null));
     expect(text).toContain(
-      'Work starts on 9 March 2026 at the earliest and goes on until 24 April 2026, 33 working days. Offered for 1 May 2026.',
+      'Work starts on 9 Mar 2026 at the earliest and goes on until 24 Apr 2026, 33 working days. Offered for 1 May 2026.',
     );
-    expect(text).toMatch(/Table Carving: Frieze 9 March 2026 20 March 2026/);
+    expect(text).toMatch(/Table Carving: Frieze 9 Mar 2026 20 Mar 2026/);
     expect(text).toContain('Kept in hand before the day offered: 4 working days.');
     expect(text).not.toContain('productive');
   });
@@ -60,7 +60,7 @@ describe('the programme of an issue', () => {
     await workbook.xlsx.load((await estimateWorkbook({ ...snapshot, programme })) as unknown as ArrayBuffer);
     const sheet = workbook.getWorksheet('Programme');
     const [carving, coats] = [4, 5].map((row) => sheet?.getRow(row).values);
-    expect(carving).toEqual([undefined, 'Table', 'Carving: Frieze', '9 March 2026', '20 March 2026', 25]);
-    expect(coats).toEqual([undefined, 'Table', 'Water gilding', '24 March 2026', '24 April 2026', 15.5]);
+    expect(carving).toEqual([undefined, 'Table', 'Carving: Frieze', '9 Mar 2026', '20 Mar 2026', 25]);
+    expect(coats).toEqual([undefined, 'Table', 'Water gilding', '24 Mar 2026', '24 Apr 2026', 15.5]);
   });
 });

@@ -34,6 +34,6 @@ export function costRows(page: PricePage, { firstRow, lastRow, net }: CostPlace)
   const whole = sumRow(page, say('sheet-cost'), all);
   const left = formula(inAmount(`${minor(net)}-${minor(whole)}`), amountOf(page, profit_minor));
   const profit = sumRow(page, say('sheet-profit-left'), left);
-  const share = formula(`IF(${net}=0,0,ROUND(${profit}/${net}*100,4))`, marginLeft_percent ?? 0);
+  const share = formula(`IF(${net}<=0,0,ROUND(${profit}/${net}*100,4))`, marginLeft_percent ?? 0);
   sumRow(page, say('sheet-margin-left'), share);
 }

@@ -2,6 +2,7 @@ import { insuredValue } from '#shared/estimates/price/insured-work';
 import { sumMinor } from '#shared/money/sum-minor';
 import { taxNumber } from './tax-number';
 import { priceOfCostFormula } from './price-formula';
+import { agreedCells } from './agreed-price';
 import { amountOf } from './line-rows';
 import type { PricePage } from './price-sources';
 import { minorOfAmount, roundedAmount } from './rounded';
@@ -37,24 +38,29 @@ function valueRow(page: PricePage, { insured, others, prices }: InsuredLines): s
   const value = insuredValue(others_minor, works, facts.price)?.toNumber() ?? 0;
   const row = sheet.next;
   const label = facts.words.say('sheet-value-insured');
-  const text = `IF(${load}>=1,0,${sum}/(1-(${load})))`;
+  const { lumpSum } = page.money;
+  // A lump sum is what there is to insure.
+  const text = lumpSum === null ? `IF(${load}>=1,0,${sum}/(1-(${load})))` : minorOfAmount(lumpSum, facts.price.digits);
   // Beside the costs, which are summed, and not among them.
   sheet.add([null, null, label, ...blanks(columns.labour - 4), formula(text, value)]);
   return sheet.here(columns.labour, row);
 }
 
-function insuredRow(page: PricePage, { priced, number }: NumberedLine, value: string): void {
+function insuredRow(page: PricePage, line: NumberedLine, value: string): void {
+  const { priced, number } = line;
   const { sheet, columns, facts, extras } = page;
   const row = sheet.next;
   const [direct, contingency] = [sheet.here(columns.direct, row), sheet.here(columns.contingency, row)];
-  const price = roundedAmount(priceOfCostFormula(page, `${direct}+${contingency}`), facts.price.digits);
+  const worked = priceOfCostFormula(page, `${direct}+${contingency}`);
   sheet.add([
     ...[number, '', priced.work.name ?? '', taxNumber(facts, priced.work.taxCategoryId)],
     ...blanks(columns.direct - columns.firstGrade),
     formula(`${value}*${extras.insured(priced.work.id)}/100`, priced.direct.toNumber()),
     ...blanks(columns.contingency - columns.overhead),
     formula(`${direct}*${contingencyShare(page)}`, priced.contingency.toNumber()),
-    formula(price, amountOf(page, priced.price_minor)),
+    ...(columns.agreed
+      ? agreedCells(page, line, worked)
+      : [formula(roundedAmount(worked, facts.price.digits), amountOf(page, priced.price_minor))]),
   ]);
 }
 

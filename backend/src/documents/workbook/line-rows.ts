@@ -1,4 +1,5 @@
 import { textOf } from '#shared/money/text-of';
+import { agreedCells } from './agreed-price';
 import { taxNumber } from './tax-number';
 import {
   directFormula,
@@ -6,8 +7,10 @@ import {
   labourFormula,
   lineCells,
   overheadFormula,
+  ownMinorFormula,
   ownPriceFormula,
   priceFormula,
+  workedPriceFormula,
 } from './price-formula';
 import type { PricePage } from './price-sources';
 import { formula, type CellContent } from './sheet';
@@ -45,9 +48,13 @@ function labourOf({ priced }: NumberedLine): number {
 /** A line with a price of its own: neither hours nor cost behind it. */
 function ownPriceRow(page: PricePage, line: NumberedLine): void {
   const { columns, sheet } = page;
-  const blanks = Array.from({ length: columns.price - columns.firstGrade }, () => null);
+  const first = columns.agreed?.worked ?? columns.price;
+  const blanks = Array.from({ length: first - columns.firstGrade }, () => null);
   const price = amountOf(page, line.priced.price_minor);
-  sheet.add([...frame(page, line), ...blanks, formula(ownPriceFormula(page, line.priced.work), price)]);
+  const cells = columns.agreed
+    ? agreedCells(page, line, ownMinorFormula(page, line.priced.work))
+    : [formula(ownPriceFormula(page, line.priced.work), price)];
+  sheet.add([...frame(page, line), ...blanks, ...cells]);
 }
 
 /** A worked line: hours by grade, labour, direct cost, overhead, contingency, and the price they come to. */
@@ -64,7 +71,9 @@ function workedRow(page: PricePage, line: NumberedLine, contingency: Contingency
     formula(directFormula(page, line, row), priced.direct.toNumber()),
     isWorked ? formula(overheadFormula(page, row), priced.overhead.toNumber()) : null,
     ...contingency(row, line),
-    formula(priceFormula(page, row), amountOf(page, priced.price_minor)),
+    ...(page.columns.agreed
+      ? agreedCells(page, line, workedPriceFormula(page, row))
+      : [formula(priceFormula(page, row), amountOf(page, priced.price_minor))]),
   ]);
 }
 

@@ -10,7 +10,10 @@ export interface MoneyRates {
   readonly consumables: string;
   /** Percent of direct cost, or the amount the risk trials found. */
   readonly contingency: string;
-  readonly profit: string;
+  /** Margin or mark-up, in percent; under a lump sum what lines are weighed by. */
+  readonly share: string;
+  /** The lump sum, in the currency; null where there is none. */
+  readonly lumpSum: string | null;
   readonly discount: string | null;
   readonly taxes: readonly string[];
 }
@@ -61,6 +64,12 @@ function profitRate(rates: RatesSheet, { words, price }: WorkbookFacts): string 
   });
 }
 
+function lumpSumRate(rates: RatesSheet, { words, price, snapshot }: WorkbookFacts): string | null {
+  if (!price.lumpSum) return null;
+  const at = { label: words.say('sheet-lump-sum'), unit: snapshot.workshop.currency };
+  return rates.rate({ ...at, value: Number(price.lumpSum), name: ['lump_sum'] });
+}
+
 function discountRate(rates: RatesSheet, { words, price, snapshot }: WorkbookFacts): string | null {
   const { discount } = price;
   if (!discount) return null;
@@ -95,7 +104,8 @@ export function moneyRates(rates: RatesSheet, facts: WorkbookFacts): MoneyRates 
     }),
     overhead: overheadRate(rates, facts),
     contingency: contingencyRate(rates, facts),
-    profit: profitRate(rates, facts),
+    share: profitRate(rates, facts),
+    lumpSum: lumpSumRate(rates, facts),
     discount: discountRate(rates, facts),
     taxes: snapshot.figures.price.taxes.map((tax) => taxRate(rates, tax, facts)),
   };

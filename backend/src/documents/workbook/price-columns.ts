@@ -10,6 +10,8 @@ export interface PriceColumns {
   readonly overhead: number;
   readonly remainder: number | null;
   readonly contingency: number;
+  /** Only where a lump sum is shared out: what a line is worked at, and what its exact share has behind the point. */
+  readonly agreed: { readonly worked: number; readonly remainder: number } | null;
   readonly price: number;
 }
 
@@ -22,7 +24,9 @@ export function priceColumns({ grades, price }: WorkbookFacts): PriceColumns {
   const [labour, direct, overhead] = [lastGrade + 1, lastGrade + 2, lastGrade + 3];
   const remainder = price.contingency.way === 'risk' ? overhead + 1 : null;
   const contingency = (remainder ?? overhead) + 1;
-  return { firstGrade, lastGrade, labour, direct, overhead, remainder, contingency, price: contingency + 1 };
+  const agreed = price.lumpSum ? { worked: contingency + 1, remainder: contingency + 2 } : null;
+  const last = agreed?.remainder ?? contingency;
+  return { firstGrade, lastGrade, labour, direct, overhead, remainder, contingency, agreed, price: last + 1 };
 }
 
 const hoursFormat = '#,##0.00####';
@@ -39,7 +43,9 @@ export function priceSheetColumns(columns: PriceColumns, { price, grades }: Work
     ...Array.from({ length: Math.max(1, grades.length) }, () => figure(13, hoursFormat)),
     ...[figure(16, minorFormat), figure(16, minorFormat), figure(16, minorFormat)],
     ...(columns.remainder === null ? [] : [figure(18, '0.000000000000')]),
-    ...[figure(16, minorFormat), figure(16, amountFormat(price.digits))],
+    figure(16, minorFormat),
+    ...(columns.agreed === null ? [] : [figure(18, minorFormat), figure(18, '0.000000000000')]),
+    figure(16, amountFormat(price.digits)),
   ];
 }
 
@@ -56,6 +62,8 @@ export function priceHeads(
     ...names,
     ...[say('sheet-head-labour', { unit }), say('sheet-head-direct', { unit }), say('sheet-head-overhead', { unit })],
     ...(columns.remainder === null ? [] : [say('sheet-head-remainder')]),
-    ...[say('sheet-head-contingency', { unit }), say('sheet-head-price', { currency })],
+    say('sheet-head-contingency', { unit }),
+    ...(columns.agreed === null ? [] : [say('sheet-head-worked', { unit }), say('sheet-head-remainder')]),
+    say('sheet-head-price', { currency }),
   ];
 }

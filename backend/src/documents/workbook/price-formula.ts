@@ -1,7 +1,7 @@
 import type { LineWork } from '#shared/estimates/price/line-work';
 import type { NumberedLine } from './workbook-facts';
 import type { PricePage } from './price-sources';
-import { roundedAmount, settledFormula } from './rounded';
+import { roundedAmount, roundedMinor, settledFormula } from './rounded';
 
 /** Hours as they enter money: to six decimals, floating point settled before. */
 const hoursTaken = (hours: string): string => `ROUND(${settledFormula(`(${hours})`)},6)`;
@@ -69,16 +69,23 @@ export function overheadFormula(page: PricePage, row: number): string {
 /** The price of a cost under margin or mark-up, in minor units and not rounded. */
 export function priceOfCostFormula({ facts, money }: PricePage, cost: string): string {
   return facts.price.profit.way === 'margin'
-    ? `(${cost})*100/(100-${money.profit})`
-    : `(${cost})*(100+${money.profit})/100`;
+    ? `(${cost})*100/(100-${money.share})`
+    : `(${cost})*(100+${money.share})/100`;
 }
 
-/** (direct + overhead + contingency) at the profit asked for, rounded once. */
-export function priceFormula(page: PricePage, row: number): string {
+/** (direct + overhead + contingency) at the profit asked for, not rounded. */
+export function workedPriceFormula(page: PricePage, row: number): string {
   const { direct, overhead, contingency } = lineCells(page, row);
-  const cost = `${direct}+${overhead}+${contingency}`;
-  return roundedAmount(priceOfCostFormula(page, cost), page.facts.price.digits);
+  return priceOfCostFormula(page, `${direct}+${overhead}+${contingency}`);
 }
+
+/** The same, rounded once. */
+export const priceFormula = (page: PricePage, row: number): string =>
+  roundedAmount(workedPriceFormula(page, row), page.facts.price.digits);
+
+/** A price of its own in minor units. */
+export const ownMinorFormula = ({ extras }: PricePage, work: LineWork): string =>
+  roundedMinor(extras.price(work.id) ?? '0');
 
 /** A price of its own, taken as it was entered. */
 export const ownPriceFormula = ({ extras, facts }: PricePage, work: LineWork): string =>

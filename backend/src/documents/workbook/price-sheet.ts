@@ -1,4 +1,5 @@
 import { exactMinor } from '#shared/money/minor-of';
+import { setAgreedThreshold } from './agreed-price';
 import { costRows } from './cost-rows';
 import { insuredRows } from './insured-rows';
 import type { NameBook } from './name-book';
@@ -40,6 +41,7 @@ function allLines(page: PricePage): { firstRow: number; lastRow: number } {
   if (isRisk) setThreshold(page, place);
   const prices = `${sheet.here(columns.price, firstRow)}:${sheet.here(columns.price, sheet.rows.length)}`;
   insuredRows(page, { insured, others, prices });
+  setAgreedThreshold(page);
   return { firstRow, lastRow: sheet.rows.length };
 }
 

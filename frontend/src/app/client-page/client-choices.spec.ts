@@ -19,9 +19,9 @@ describe('What a client may choose', () => {
     );
     expect(cards).toEqual([
       'Water gilding, burnished included',
-      'Oil gilding − €615.00',
-      'Silver leaf − €900.00',
-      'A crate + €221.40',
+      'Oil gilding −€615.00',
+      'Silver leaf −€900.00',
+      'A crate +€221.40',
       'A sample no difference',
     ]);
     expect(visit.text).toContain('Ready sooner: about 4 weeks instead of 6.');

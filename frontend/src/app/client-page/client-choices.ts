@@ -59,8 +59,7 @@ export class ClientChoices {
   /** What it is more or less than the base, with a true minus. */
   protected difference({ difference_minor }: Alternative): string {
     if (difference_minor === 0) return $localize`no difference`;
-    const amount = this.formats.money(Math.abs(difference_minor));
-    return difference_minor > 0 ? `+ ${amount}` : `− ${amount}`;
+    return this.formats.signed(difference_minor, (size_minor) => this.formats.money(size_minor));
   }
 
   /** How long it takes, where that is another time than the base takes. */

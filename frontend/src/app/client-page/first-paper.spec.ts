@@ -5,7 +5,7 @@ type Issue = ClientOverview['jobs'][number]['issues'][number];
 
 const issue = (id: string, state: Issue['state']): Issue => ({
   ...{ id, state, kind: 'estimate', number: '2026-001', letter: 'A', title: 'Pier table' },
-  ...{ issuedOn: '2026-01-02', validUntil: '2026-02-02', gross_minor: 100_00 },
+  ...{ issuedOn: '2026-01-02', validUntil: '2026-02-02', gross_minor: 100_00, currency: 'EUR' },
 });
 const job = (...issues: Issue[]) => ({ id: 'j', number: '2026-001', title: 'Pier table', issues });
 const invoice = (open_minor: number) => ({

@@ -16,13 +16,8 @@ import { UnfinishedEntries } from './draft/unfinished-entries';
 import { EstimateClient } from './estimate-client';
 import { LiveFigures } from './figures/live-figures';
 import { asCosted, asPriced } from './figures/as-priced';
+import type { OpenEstimate } from './open-estimate';
 import { Presence, type PresenceAnswer } from './presence';
-
-/** Which estimate the workspace shows. */
-export interface OpenEstimate {
-  readonly jobId: string;
-  readonly estimateId: string;
-}
 
 type EstimateHead = Pick<ReadEstimate, 'id' | 'number' | 'version' | 'rateCardId' | 'currency'>;
 
@@ -182,6 +177,13 @@ export class EstimateStore {
   async takeCard(rateCardId: string): Promise<void> {
     const before = this.known()?.rateCardId;
     if ((await this.workOn(rateCardId)) && before) this.rows.recordCard({ before, after: rateCardId });
+  }
+
+  /** Hears at once how things stand, without waiting for the next turn of `Presence`; a server that is away tells nothing. */
+  async lookAgain(): Promise<void> {
+    const id = this.known()?.id;
+    const answer = id && (await this.presence.once(id));
+    if (answer) this.hear(answer);
   }
 
   /** After an issue was made or marked. */

@@ -15,12 +15,17 @@ export class Presence {
   private readonly client = inject(EstimateClient);
   private readonly document = inject(DOCUMENT);
 
+  /** Asks at once; undefined where the server is away. */
+  once(estimateId: string): Promise<PresenceAnswer | undefined> {
+    return this.client.presence(estimateId).catch(passed);
+  }
+
   of(estimateId: string): Observable<PresenceAnswer> {
     const isLookedAt = () => this.document.visibilityState !== 'hidden';
     const shown = fromEvent(this.document, 'visibilitychange').pipe(map(() => 0));
     return merge(timer(every_ms / 4, every_ms), shown).pipe(
       filter(isLookedAt),
-      exhaustMap(() => this.client.presence(estimateId).catch(passed)),
+      exhaustMap(() => this.once(estimateId)),
       catchError(() => EMPTY),
       filter((answer) => answer !== undefined),
     );

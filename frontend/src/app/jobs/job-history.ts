@@ -20,7 +20,6 @@ interface Line {
 
 /** So many changes are read at a glance; more of them wait behind their number. */
 const glance = 4;
-const isDay = /^\d{4}-\d{2}-\d{2}$/;
 
 /** What was done on a job, newest first. */
 @Component({
@@ -128,13 +127,6 @@ export class JobHistory {
 
   private lineOf({ id, at, name, code, values, changes }: HistoryLine): Line {
     const when = `${this.formats.dayOf(at)}, ${this.formats.time(at)}`;
-    return { id, when, who: name, changes, text: this.words.say(code as WordCode, this.readable(values)) };
-  }
-
-  /** Days lie in the history as they are kept, and are read as the workshop writes them. */
-  private readable(values: HistoryLine['values']): HistoryLine['values'] {
-    const read = (value: string | number) =>
-      typeof value === 'string' && isDay.test(value) ? this.formats.day(value) : value;
-    return Object.fromEntries(Object.entries(values).map(([name, value]) => [name, read(value)]));
+    return { id, when, who: name, changes, text: this.words.say(code as WordCode, values) };
   }
 }

@@ -245,7 +245,7 @@ describe('The pages of rate cards', () => {
     expect(text()).toContain('Nothing differs from House values.');
     expect(text()).toContain('2026-004-1 Pier table');
     expect(text()).toContain('€2,352.57');
-    expect(text()).toContain('+ €155.76');
+    expect(text()).toContain('+€155.76');
     expect(text()).not.toContain('Frieze · Gilding');
     button('1 line')?.click();
     await settle();

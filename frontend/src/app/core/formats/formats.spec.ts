@@ -19,6 +19,21 @@ describe('Formats', () => {
     expect(figures.map(plain)).toEqual([money, whole, number, typed]);
   });
 
+  // U+2212 stands directly before the figure, whatever hyphen the locale's own writing has.
+  it.each([
+    ['en-GB', 'EUR', '−€355.84', '−€356', '−355.84', '−JP¥35,584', '−12.5', '−7.5%', '+€10.00', '€0.00'],
+    ['de-DE', 'EUR', '−355,84 €', '−356 €', '−355,84', '−35.584 ¥', '−12,5', '−7,5 %', '+10,00 €', '0,00 €'],
+  ])('writes what is below nothing with a true minus in %s', (locale, currency, ...expected) => {
+    signIn(['owner'], { locale, currency });
+    const formats = TestBed.inject(Formats);
+    const money = (size_minor: number) => formats.money(size_minor);
+    const amounts = [formats.money(-35_584), formats.wholeMoney(-35_584), formats.amount(-35_584)];
+    const others = [formats.moneyIn('JPY', -35_584), formats.number(-12.5), formats.figure('percent', -7.5)];
+    const signed = [formats.signed(1_000, money), formats.signed(0, money)];
+    expect([...amounts, ...others, ...signed].map(plain)).toEqual(expected);
+    expect(plain(formats.signed(-1_144, money))).toBe(plain(formats.money(-1_144)));
+  });
+
   it('shows the unit a workshop does not use beside the one it does', () => {
     signIn(['owner'], { lengthUnit: 'mm' });
     const formats = TestBed.inject(Formats);
@@ -48,6 +63,14 @@ describe('Formats', () => {
     expect(formats.currencySign()).toBe('£');
     session.put(undefined, '');
     expect(formats.lengthUnit()).toBe('mm');
+  });
+
+  it('words a day among the values as the workshop writes it', () => {
+    signIn(['owner'], { locale: 'de-DE' });
+    const values = { number: '2026-011-1', letter: 'A', until: '2027-01-30' };
+    expect(TestBed.inject(Words).say('history-slot-held', values)).toBe(
+      'Held the slot of estimate 2026-011-1 for issue A until 30. Jan. 2027',
+    );
   });
 
   it('words a code with its figures in the units of the workshop', () => {

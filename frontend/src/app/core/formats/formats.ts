@@ -5,9 +5,11 @@ import { textOf } from '#shared/money/text-of';
 import { formatDecimal } from '#shared/units/format-decimal';
 import { formatLength } from '#shared/units/format-length';
 import { formatsFor } from '#shared/units/formats-for';
+import { trueMinus } from '#shared/units/true-minus';
 import { Session } from '../session/session';
 import { CATALOGUE } from './catalogue';
 import { dayStyles, type DayStyle } from './day-styles';
+import { SHOWN_CURRENCY } from './shown-currency';
 import { strangerSettings } from './stranger-settings';
 
 /** Writes figures, money, days and times as the workshop has them; everything is read from signals, so a change of setting shows at once. */
@@ -18,7 +20,9 @@ export class Formats {
   private readonly reader = computed(() => this.session.reader() ?? strangerSettings());
 
   readonly locale = computed(() => this.reader().locale);
-  readonly currency = computed(() => this.reader().currency);
+  private readonly shown = inject(SHOWN_CURRENCY);
+  /** The workshop's, or that of the page's own subject. */
+  readonly currency = computed(() => this.shown() ?? this.reader().currency);
   readonly lengthUnit = computed(() => this.reader().lengthUnit);
   readonly timeZone = computed(() => this.reader().timeZone);
   readonly currencyDigits = computed(() => currencyDigits(this.currency()));
@@ -56,7 +60,7 @@ export class Formats {
   moneyIn(currency: string, amount_minor: MinorUnits): string {
     if (currency === this.currency()) return this.money(amount_minor);
     const format = new Intl.NumberFormat(this.locale(), { style: 'currency', currency, numberingSystem: 'latn' });
-    return format.format(textOf(amount_minor, currencyDigits(currency)) as unknown as number);
+    return trueMinus(format.format(textOf(amount_minor, currencyDigits(currency)) as unknown as number));
   }
 
   /** Money without its minor units, for a place where the whole figure stands beside it or in its explanation. */
@@ -69,7 +73,7 @@ export class Formats {
     } as const;
     const format = new Intl.NumberFormat(this.locale(), options);
     // A decimal text is formatted digit by digit, where a division would make a float of it.
-    return format.format(textOf(amount_minor, this.currencyDigits()) as unknown as number);
+    return trueMinus(format.format(textOf(amount_minor, this.currencyDigits()) as unknown as number));
   }
 
   /** Money without its sign, for a column whose heading has it. */
@@ -82,13 +86,19 @@ export class Formats {
     const count = currencyDigits(currency);
     const digits = { minimumFractionDigits: count, maximumFractionDigits: count };
     const format = new Intl.NumberFormat(this.locale(), { numberingSystem: 'latn', ...digits });
-    return format.format(textOf(amount_minor, count) as unknown as number);
+    return trueMinus(format.format(textOf(amount_minor, count) as unknown as number));
   }
 
   /** A plain number with at most and at least so many decimals, grouped as the locale has it. */
   number(figure: number, most = 2, least = 0): string {
     const digits = { minimumFractionDigits: least, maximumFractionDigits: most };
-    return new Intl.NumberFormat(this.locale(), { numberingSystem: 'latn', ...digits }).format(figure + 0);
+    return trueMinus(new Intl.NumberFormat(this.locale(), { numberingSystem: 'latn', ...digits }).format(figure + 0));
+  }
+
+  /** What something is more or less by: its sign directly before the size as `write` has it; nothing is written without one. */
+  signed(difference: number, write: (size: number) => string): string {
+    const sign = difference > 0 ? '+' : difference < 0 ? '−' : '';
+    return `${sign}${write(Math.abs(difference))}`;
   }
 
   /** A number as somebody here would type it: ungrouped, with the locale's decimal sign. */

@@ -41,19 +41,16 @@ export class FrozenAlternatives {
   readonly totals = input.required<readonly AlternativeTotal[]>();
 
   protected readonly rows = computed(() =>
-    this.alternatives().map(({ id, name }) => {
+    this.alternatives().flatMap(({ id, name }) => {
       const total = this.totals().find((one) => one.id === id);
-      return {
-        id,
-        name,
-        gross: total ? this.formats.money(total.gross_minor) : '',
-        difference: total ? this.difference(total.difference_minor) : '',
-      };
+      // One with nothing in it was not offered.
+      if (!total) return [];
+      const { gross_minor, difference_minor } = total;
+      return [{ id, name, gross: this.formats.money(gross_minor), difference: this.difference(difference_minor) }];
     }),
   );
 
   private difference(difference_minor: number): string {
-    const sign = difference_minor > 0 ? '+ ' : difference_minor < 0 ? '− ' : '';
-    return `${sign}${this.formats.money(Math.abs(difference_minor))}`;
+    return this.formats.signed(difference_minor, (size_minor) => this.formats.money(size_minor));
   }
 }

@@ -67,7 +67,7 @@ export class IssuePage {
       ({ before_minor, after_minor }) => (after_minor ?? 0) - (before_minor ?? 0),
     );
     const sum_minor = sumMinor(changes);
-    return `${sum_minor < 0 ? '−' : '+'} ${this.formats.money(Math.abs(sum_minor))}`;
+    return this.formats.signed(sum_minor, (size_minor) => this.formats.money(size_minor));
   });
   protected readonly net = computed(() => this.formats.money(this.store.priced()?.price.net_minor ?? 0));
   protected readonly gross = computed(() => this.formats.money(this.store.priced()?.price.gross_minor ?? 0));

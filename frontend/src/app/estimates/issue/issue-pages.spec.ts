@@ -9,6 +9,7 @@ import { signIn, words } from '../../../test/sign-in';
 import { Confirm } from '../../ui/dialog/confirm';
 import { NOW } from '../../core/now';
 import { EstimateStore } from '../estimate-store';
+import type { PresenceAnswer } from '../presence';
 import { IssueClient, type IssueMark, type ReadIssue } from './issue-client';
 import { IssuePage } from './issue-page';
 import { IssueViewPage } from './issue-view-page';
@@ -130,9 +131,7 @@ describe('The pages of issues', () => {
 
     it('tells what is new line by line, and what it comes to', async () => {
       await open(IssuePage);
-      expect(spoken(element().querySelector('summary'))).toContain(
-        'One line differs from issue A, together by +€2.50',
-      );
+      expect(spoken(element().querySelector('summary'))).toContain('One line differs from issue A, together by +€2.50');
       expect(spoken(element().querySelector('app-difference-table'))).toContain('Top edge, Carving 10.0012.50+2.50');
     });
 
@@ -198,6 +197,26 @@ describe('The pages of issues', () => {
         ['/jobs', ids.job, 'estimates', ids.estimate, 'measure'],
         { queryParams: { member: ids.leg } },
       ]);
+    });
+
+    it('hears at once of a card that has just come into force, before it says that nothing stops it', async () => {
+      let answer = (_present: PresenceAnswer): void => undefined;
+      const asked = () => new Promise<PresenceAnswer>((resolve) => (answer = resolve));
+      (server as { presence: () => Promise<PresenceAnswer> }).presence = asked;
+      await open(IssuePage);
+      expect(spoken(element().querySelector('app-issue-box'))).not.toContain('Nothing stops it');
+      answer({ version: 1, others: [], rateCardInForceId: ids.leg });
+      await settle();
+      const box = spoken(element().querySelector('app-issue-box'));
+      expect(box).toContain('The old card is meant');
+      expect(box).not.toContain('Nothing stops it');
+    });
+
+    it('says that nothing stops it once it was heard that nothing does', async () => {
+      const present: PresenceAnswer = { version: 1, others: [], rateCardInForceId: ids.card };
+      (server as { presence: () => Promise<PresenceAnswer> }).presence = () => Promise.resolve(present);
+      await open(IssuePage);
+      expect(spoken(element().querySelector('app-issue-box'))).toContain('Nothing stops it');
     });
 
     it('is issued by one button; where it did not arrive it says so and may be pressed again', async () => {

@@ -31,13 +31,20 @@ export class PaperPreview {
     return [workshop?.telephone, workshop?.email].filter(Boolean).join(' · ');
   });
   protected readonly memberNames = computed(() => new Map(this.store.members().map(({ id, name }) => [id, name])));
+  /** Alternatives with nothing in them stay off the papers. */
+  private readonly empty = computed(() => {
+    const findings = this.store.figures()?.findings ?? [];
+    return new Set(findings.filter(({ code }) => code === 'alternative-empty').map(({ about }) => about));
+  });
   protected readonly alternatives = computed(() =>
-    (this.store.settings()?.alternatives ?? []).map(({ id, name, note }) => ({
-      id,
-      name,
-      note,
-      difference: this.difference(this.totals.totals().get(id)?.difference_minor),
-    })),
+    (this.store.settings()?.alternatives ?? [])
+      .filter(({ id }) => !this.empty().has(id))
+      .map(({ id, name, note }) => ({
+        id,
+        name,
+        note,
+        difference: this.difference(this.totals.totals().get(id)?.difference_minor),
+      })),
   );
   protected readonly texts = computed(() => {
     const { included = '', excluded = '', terms = '' } = this.store.settings() ?? {};
@@ -51,8 +58,7 @@ export class PaperPreview {
 
   private difference(difference_minor: number | undefined): string {
     if (difference_minor === undefined) return '';
-    const money = this.formats.money(Math.abs(difference_minor));
     if (difference_minor === 0) return $localize`at the same price`;
-    return `${difference_minor < 0 ? '− ' : '+ '}${money}`;
+    return this.formats.signed(difference_minor, (size_minor) => this.formats.money(size_minor));
   }
 }

@@ -91,7 +91,6 @@ export class AlternativesPart {
 
   private difference(amount_minor: number | undefined): string {
     if (amount_minor === undefined) return '…';
-    const sign = amount_minor > 0 ? '+ ' : amount_minor < 0 ? '− ' : '';
-    return `${sign}${this.formats.amount(Math.abs(amount_minor))}`;
+    return this.formats.signed(amount_minor, (size_minor) => this.formats.amount(size_minor));
   }
 }

@@ -72,7 +72,6 @@ export class DifferenceTable {
   }
 
   private signed(amount_minor: number): string {
-    const sign = amount_minor < 0 ? '− ' : '+ ';
-    return amount_minor === 0 ? this.formats.amount(0) : `${sign}${this.formats.amount(Math.abs(amount_minor))}`;
+    return this.formats.signed(amount_minor, (size_minor) => this.formats.amount(size_minor));
   }
 }

@@ -49,13 +49,17 @@ function typedValue({ entry, holds }: CellEntry, text: string, locale: string) {
   return parsed.ok ? { ok: true as const, value: holds === 'number' ? parsed.value : parsed.decimal } : parsed;
 }
 
+const withoutMeasures = ({ measured: _measured, ...line }: Extract<ExtraLine, { kind: 'paid-quantity' }>) => line;
+
 /** Reads a cell as somebody with this locale typed it. */
 export function typedCell(line: ExtraLine, typed: { cell: ExtraCell; text: string }, locale: string): TypedCell {
   const entry = entryOf(line, typed.cell);
   if (!entry) return { ok: true, line };
   const read = typedValue(entry, typed.text, locale);
   if (!read.ok) return read;
-  const parsed = readBy(extraLineSchema, { ...line, [entry.entry]: read.value });
+  // A quantity that is typed is no longer the one that was reckoned.
+  const kept = entry.entry === 'quantity' && line.kind === 'paid-quantity' ? withoutMeasures(line) : line;
+  const parsed = readBy(extraLineSchema, { ...kept, [entry.entry]: read.value });
   if (parsed.success) return { ok: true, line: parsed.data };
   const [{ code, values }] = complaintsOf(parsed.error);
   return { ok: false, code, values };

@@ -10,6 +10,7 @@ import {
 } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
 import type * as z from 'zod';
+import type { MeasuredWork } from '#shared/estimates/price/measured-work';
 import type { ExtraLine } from '#shared/estimates/settings';
 import { extraLineSchema } from '#shared/estimates/settings-schema';
 import type { Entries } from '../../core/forms/schema-controls';
@@ -21,6 +22,7 @@ import { NumberField } from '../../ui/field/number-field';
 import { PercentField } from '../../ui/field/percent-field';
 import { EstimateStore } from '../estimate-store';
 import { liveForm, type LiveForm } from '../settings/live-form';
+import { MeasuredQuantity, type Reckoned } from './measured-quantity';
 import { ExtraLinesStore } from './extra-lines-store';
 import { workNames } from './extra-names';
 
@@ -33,7 +35,7 @@ const schemaOf = (kind: ExtraLine['kind']): z.ZodObject =>
 /** Everything one further line says, for the chosen line of the table; it saves itself. */
 @Component({
   selector: 'app-extra-line-form',
-  imports: [DecimalField, Entry, Field, NumberField, PercentField, ReactiveFormsModule],
+  imports: [DecimalField, Entry, Field, MeasuredQuantity, NumberField, PercentField, ReactiveFormsModule],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './extra-line-form.html',
 })
@@ -65,6 +67,17 @@ export class ExtraLineForm implements OnInit {
       apply: (value: unknown) => this.lines.replace(value as ExtraLine),
     };
     this.live = runInInjectionContext(this.injector, () => liveForm(part, part.present()));
+  }
+
+  protected measured(): MeasuredWork | null {
+    const line = this.line();
+    return line.kind === 'paid-quantity' ? (line.measured ?? null) : null;
+  }
+
+  /** A quantity reckoned by a rule of the trade, or none: then it follows a rule of the workshop's own. */
+  protected takeMeasured(reckoned: Reckoned | null): void {
+    this.live.group.markAsDirty();
+    this.live.group.patchValue(reckoned ?? { measured: null });
   }
 
   protected message(path: string): string {

@@ -175,6 +175,40 @@ describe('PricePage', () => {
       expect([field('Mark-up').value, store.priced()!.price.net_minor]).toEqual(['25', before_minor]);
     });
 
+    it('from a lump sum, beginning with what the lines come to, and shows the margin that is left', async () => {
+      await open('profit');
+      const before_minor = store.priced()!.price.subtotal_minor;
+      await choose('Profit is', 'lump-sum');
+      expect(store.priced()!.price.subtotal_minor).toBe(before_minor);
+      await type('Lump sum', '1000');
+      await settle(700);
+      expect(server.settings.profit).toEqual({ way: 'lump-sum', amount: '1000' });
+      expect(store.priced()!.price.net_minor).toBe(100_000);
+      const [asked, left] = [...element().querySelectorAll('app-profit-figures tbody tr')].map((row) => spoken(row));
+      expect(asked).toBe('asked––');
+      expect(left).toMatch(/^left[−\d]/);
+    });
+
+    it('and leaves no margin where a discount takes more than the price', async () => {
+      await open('profit');
+      await choose('Discount', 'amount');
+      await type('Amount taken off', '999999');
+      expect(spoken(element().querySelector('app-profit-figures .strong td'))).toBe('–');
+    });
+
+    it('and says why the trials have another direct cost where the price itself is insured', async () => {
+      await open('extras');
+      button('Insurance in care').click();
+      await settle();
+      fixture.componentRef.setInput('part', 'profit');
+      await settle(900);
+      const { direct_minor } = store.costed()!.cost.price;
+      const atLikely_minor = store.costed()!.cost.risk!.direct_minor.atLikely;
+      expect(direct_minor).toBeGreaterThan(atLikely_minor);
+      const difference = ((direct_minor - atLikely_minor) / 100).toFixed(2);
+      expect(spoken(element().querySelector('app-risk-table'))).toContain(`differs by €${difference} of insurance`);
+    });
+
     it('and warns where a discount takes the price below its cost', async () => {
       await open('profit');
       await choose('Discount', 'percent');
@@ -199,7 +233,7 @@ describe('PricePage', () => {
       expect(element().querySelector('app-profit-form [aria-invalid="true"]')).not.toBeNull();
       await type('Margin', '20');
       await settle(700);
-      expect(server.settings.profit?.percent).toBe('20');
+      expect(server.settings.profit).toMatchObject({ percent: '20' });
     });
 
     it('and shows again what an undo brings back', async () => {
@@ -250,6 +284,43 @@ describe('PricePage', () => {
       await fill(0, 4, '3.10');
       await settle(700);
       expect(server.settings.extras[0]).toMatchObject({ price_per_dm3: '3.1' });
+    });
+
+    it('by a measuring rule, the quantity reckoned, explained and kept with the line', async () => {
+      await open('extras');
+      button('Measured work').click();
+      await settle();
+      await choose('Measured by', 'narrow-girth');
+      await type('Length measured', '3048 mm');
+      await type('Girth measured', '4 in');
+      await settle(700);
+      // An Old Hand, Hints for Painters: 4 in counts as 6; 3.048 × 0.1524 m.
+      expect(server.settings.extras[0]).toMatchObject({
+        ...{ rule: 'narrow members at a girth of 6 or 12 inches', quantity: '0.4645', unit: 'm²' },
+        measured: { rule: 'narrow-girth', length: { mm: 3048 }, girth: { text: '4 in', mm: 101.6 } },
+      });
+      element().querySelector<HTMLElement>('app-measured-quantity app-figure button')?.click();
+      await settle();
+      expect(spoken(element().querySelector('app-reason-panel'))).toContain('is paid as');
+      await choose('Measured by', 'own');
+      await type('Quantity', '7');
+      await settle(700);
+      expect(server.settings.extras[0]).toMatchObject({ quantity: '7' });
+      expect(server.settings.extras[0]).not.toHaveProperty('measured');
+    });
+
+    it('and a figure typed over a reckoned quantity stands by itself', async () => {
+      await open('extras');
+      button('Measured work').click();
+      await settle();
+      await choose('Measured by', 'carved-each-side');
+      await type('Area measured flat', '0.5 m²');
+      await settle(700);
+      expect(server.settings.extras[0]).toMatchObject({ quantity: '1' });
+      await fill(0, 2, '9');
+      await settle(700);
+      expect(server.settings.extras[0]).toMatchObject({ quantity: '9' });
+      expect(server.settings.extras[0]).not.toHaveProperty('measured');
     });
 
     it('entered in full in the form of the chosen line', async () => {
@@ -352,7 +423,7 @@ describe('PricePage', () => {
     server.totals = [{ id: ids.leg, gross_minor: 123_456, difference_minor: -2_000 }];
     await open('alternatives', ['office']);
     await settle();
-    expect(grid()).toEqual([['Bare back', '1,234.56', '− 20.00']]);
+    expect(grid()).toEqual([['Bare back', '1,234.56', '−20.00']]);
     expect(element().querySelector('.content button')).toBeNull();
   });
 

@@ -25,8 +25,8 @@ import { profitExplained } from './profit-explained';
       <tbody>
         <tr>
           <th scope="row" i18n>asked</th>
-          <td>{{ percent(cost().margin_percent) }}</td>
-          <td>{{ percent(cost().markUp_percent) }}</td>
+          <td>{{ percent(isAgreed() ? null : cost().margin_percent) }}</td>
+          <td>{{ percent(isAgreed() ? null : cost().markUp_percent) }}</td>
           <td></td>
         </tr>
         <tr class="strong" [class.loss]="cost().profit_minor < 0">
@@ -55,6 +55,8 @@ export class ProfitFigures {
   private readonly formats = inject(Formats);
 
   readonly cost = input.required<PriceCost>();
+  /** The price is an agreed sum: no margin was asked for. */
+  readonly isAgreed = input(false);
   readonly isPending = input(false);
 
   protected readonly profit = computed(() => this.formats.money(this.cost().profit_minor));

@@ -1,5 +1,5 @@
 import * as z from 'zod';
-import type { EstimateSettings } from '#shared/estimates/settings';
+import type { EstimateProfit, EstimateSettings } from '#shared/estimates/settings';
 import type { DecimalText } from '#shared/money/decimal';
 import { marginOfMarkUp, markUpOfMargin } from '#shared/money/margin';
 import { complainAt, decimalEntry, decimalPercentEntry } from '#shared/problems/card-entry-schema';
@@ -9,8 +9,9 @@ import type { Entries } from '../../core/forms/schema-controls';
 const belowHundred = decimalEntry.refine((text) => Number(text) < 100, complain('entry-not-below', { maximum: 100 }));
 
 const choices = {
-  profit: z.enum(['card', 'margin', 'mark-up']),
+  profit: z.enum(['card', 'margin', 'mark-up', 'lump-sum']),
   profit_percent: z.string(),
+  lumpSum: z.string(),
   contingency: z.enum(['card', 'share', 'risk']),
   contingency_percent: z.string(),
   discount: z.enum(['none', 'percent', 'amount']),
@@ -20,10 +21,17 @@ const choices = {
 
 type Choices = z.infer<z.ZodObject<typeof choices>>;
 
+function profitFigure({ profit }: Choices): (readonly [keyof Choices, z.ZodType])[] {
+  if (profit === 'card') return [];
+  if (profit === 'lump-sum') return [['lumpSum', decimalEntry]];
+  return [['profit_percent', profit === 'margin' ? belowHundred : decimalEntry]];
+}
+
 /** Which figure is asked for by what was chosen, and what it has to be. */
-function askedFigures({ profit, contingency, discount }: Choices): [keyof Choices, z.ZodType][] {
+function askedFigures(entries: Choices): [keyof Choices, z.ZodType][] {
+  const { contingency, discount } = entries;
   return [
-    ...(profit === 'card' ? [] : [['profit_percent', profit === 'margin' ? belowHundred : decimalEntry] as const]),
+    ...profitFigure(entries),
     ...(contingency === 'share' ? [['contingency_percent', decimalPercentEntry] as const] : []),
     ...(discount === 'none'
       ? []
@@ -45,6 +53,7 @@ type ProfitSettings = Pick<EstimateSettings, 'profit' | 'contingency' | 'discoun
 export const noProfitEntries: ProfitEntries = {
   profit: 'card',
   profit_percent: '',
+  lumpSum: '',
   contingency: 'card',
   contingency_percent: '',
   discount: 'none',
@@ -55,7 +64,8 @@ export const noProfitEntries: ProfitEntries = {
 /** The settings as the form shows them. */
 export const profitEntriesOf = ({ profit, contingency, discount, taxCategoryId }: ProfitSettings): ProfitEntries => ({
   profit: profit?.way ?? 'card',
-  profit_percent: profit?.percent ?? '',
+  profit_percent: profit && profit.way !== 'lump-sum' ? profit.percent : '',
+  lumpSum: profit?.way === 'lump-sum' ? profit.amount : '',
   contingency: contingency?.way ?? 'card',
   contingency_percent: contingency?.way === 'share' ? contingency.percent : '',
   discount: discount?.way ?? 'none',
@@ -63,11 +73,16 @@ export const profitEntriesOf = ({ profit, contingency, discount, taxCategoryId }
   taxCategoryId,
 });
 
+function profitSetting({ profit, profit_percent, lumpSum }: Choices): EstimateProfit | null {
+  if (profit === 'card') return null;
+  return profit === 'lump-sum' ? { way: profit, amount: lumpSum } : { way: profit, percent: profit_percent };
+}
+
 /** What was entered as the settings keep it. */
 export function profitSettingsOf(entries: Choices): ProfitSettings {
-  const { profit, contingency, discount } = entries;
+  const { contingency, discount } = entries;
   return {
-    profit: profit === 'card' ? null : { way: profit, percent: entries.profit_percent },
+    profit: profitSetting(entries),
     contingency:
       contingency === 'card'
         ? null

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
 import type { EstimateSettings } from '#shared/estimates/settings';
+import { textOf } from '#shared/money/text-of';
 import type { Contingency, Profit } from '#shared/rate-cards/money-card';
 import { Formats } from '../../core/formats/formats';
 import { DecimalField } from '../../ui/field/decimal-field';
@@ -60,7 +61,7 @@ export class ProfitForm {
       schema: profitFormSchema,
       present: () => this.entries(),
       apply: (value) => {
-        this.profitBefore = this.store.settings()?.profit ?? this.money()?.profit;
+        this.profitBefore = this.shared();
         this.store.changeSettings(profitSettingsOf(value));
       },
     },
@@ -74,6 +75,7 @@ export class ProfitForm {
     return settings?.extras ? profitEntriesOf(settings as EstimateSettings) : undefined;
   });
   protected readonly cost = computed(() => this.store.costed()?.cost);
+  protected readonly isAgreed = computed(() => this.store.settings()?.profit?.way === 'lump-sum');
   protected readonly belowCost = computed(() =>
     (this.cost()?.findings ?? []).filter(({ code }) => code === 'price-below-cost' || code === 'price-below-nothing'),
   );
@@ -90,12 +92,28 @@ export class ProfitForm {
   );
   protected readonly percentile = computed(() => this.money()?.contingency.percentile ?? 80);
 
+  /** The margin or mark-up lines are worked with. */
+  private shared(): Profit | undefined {
+    return this.own() ?? this.money()?.profit;
+  }
+
+  /** A margin or mark-up of the estimate's own. */
+  private own(): Profit | undefined {
+    const profit = this.store.settings()?.profit;
+    return profit && profit.way !== 'lump-sum' ? profit : undefined;
+  }
+
   /** Changing the way keeps the price where it is. */
   protected takeProfitWay(): void {
-    const { profit } = this.live.group.getRawValue();
-    const own = this.store.settings()?.profit;
+    const { profit, lumpSum } = this.live.group.getRawValue();
+    if (profit === 'lump-sum') {
+      const subtotal_minor = this.store.priced()?.price.subtotal_minor ?? 0;
+      if (!lumpSum) this.live.group.patchValue({ lumpSum: textOf(subtotal_minor, this.formats.currencyDigits()) });
+      return;
+    }
+    const own = this.own();
     // Where the old percentage could be read the other way it is in the draft already.
-    const before = own?.way === profit ? this.profitBefore : (own ?? this.money()?.profit);
+    const before = own?.way === profit ? this.profitBefore : this.shared();
     if (before && profit && profit !== 'card')
       this.live.group.patchValue({ profit_percent: profitSaidAs(profit, before) });
   }

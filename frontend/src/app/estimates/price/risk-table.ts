@@ -22,6 +22,8 @@ export class RiskTable {
   readonly percentile = input.required<number>();
   /** Names of the leaf products. */
   readonly leafNames = input<ReadonlyMap<string, string>>(new Map());
+  /** The direct cost the price is worked from, in minor units. */
+  readonly direct_minor = input.required<number>();
   readonly isPending = input(false);
 
   protected readonly columns = computed(() =>
@@ -38,6 +40,11 @@ export class RiskTable {
         this.row(this.leafName(productId), booklets, (figure) => this.formats.number(figure, 0)),
       ),
     ];
+  });
+  /** Why the direct cost at the likely values is not the one above; empty where it is. */
+  protected readonly insuredDifference = computed(() => {
+    const difference_minor = this.direct_minor() - this.risk().direct_minor.atLikely;
+    return difference_minor === 0 ? '' : this.formats.money(Math.abs(difference_minor));
   });
   protected readonly trials = computed(() => this.formats.number(this.risk().trials, 0));
   protected readonly contingency = computed(() => this.formats.money(this.risk().contingency_minor));

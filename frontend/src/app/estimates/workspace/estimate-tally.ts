@@ -106,9 +106,8 @@ export class EstimateTally {
   }
 
   private difference(difference_minor: number): string {
-    const sign = difference_minor < 0 ? '− ' : '+ ';
     if (difference_minor === 0) return $localize`unchanged`;
-    return `${sign}${this.formats.wholeMoney(Math.abs(difference_minor))}`;
+    return this.formats.signed(difference_minor, (size_minor) => this.formats.wholeMoney(size_minor));
   }
 
   /** Once a programme is kept it says more than a count of days. */

@@ -1,5 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, input, viewChild } from '@angular/core';
-import type { OpenEstimate } from '../estimate-store';
+import type { OpenEstimate } from '../open-estimate';
 import { Workspace } from './workspace';
 
 /** The page of one estimate. Another estimate is another workspace: nothing of the first stays. */

@@ -59,6 +59,15 @@ describe('Workspace', () => {
   });
   afterEach(() => jest.useRealTimers());
 
+  it('writes money in the currency of the estimate, whatever the workshop’s is', async () => {
+    server.currency = 'JPY';
+    await open();
+    const { net_minor } = fixture.componentInstance['store'].priced()!.price;
+    const yen = new Intl.NumberFormat('en-GB', { style: 'currency', currency: 'JPY' }).format(net_minor);
+    expect(text('app-tally-bar')[0]).toContain(yen);
+    expect(text('app-tally-bar')[0]).not.toContain('€');
+  });
+
   it('names the job, the letter it works toward and every place with its figure', async () => {
     server.issues = () => Promise.resolve([issueA]);
     await open();

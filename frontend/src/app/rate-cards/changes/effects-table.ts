@@ -72,14 +72,11 @@ export class EffectsTable {
   private share({ before_minor, after_minor }: CardEffect): string {
     if (before_minor === 0 || after_minor === before_minor) return '';
     const percent = ((after_minor - before_minor) / before_minor) * 100;
-    const text = this.formats.figure('percent', Math.abs(percent));
-    return percent < 0 ? `− ${text}` : `+ ${text}`;
+    return this.formats.signed(percent, (size) => this.formats.figure('percent', size));
   }
 
   private signed(amount_minor: number, currency: string): string {
-    if (amount_minor === 0) return this.money(0, currency);
-    const text = this.money(Math.abs(amount_minor), currency);
-    return amount_minor < 0 ? `− ${text}` : `+ ${text}`;
+    return this.formats.signed(amount_minor, (size_minor) => this.money(size_minor, currency));
   }
 
   /** An estimate keeps the currency it was begun in, whatever the workshop's is now. */

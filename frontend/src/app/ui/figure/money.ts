@@ -2,7 +2,7 @@ import { ChangeDetectionStrategy, Component, booleanAttribute, computed, inject,
 import type { MinorUnits } from '#shared/money/decimal';
 import { Formats } from '../../core/formats/formats';
 
-/** An amount in the workshop's currency. `whole` leaves the minor units out; `signed` writes + before what is added. */
+/** An amount in the workshop's currency. `whole` leaves the minor units out; `signed` writes + before what is added, directly as a minus stands. */
 @Component({
   selector: 'app-money',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -21,8 +21,8 @@ export class Money {
   readonly signed = input(false, { transform: booleanAttribute });
 
   protected readonly text = computed(() => {
-    const amount_minor = this.amount_minor();
-    const text = this.whole() ? this.formats.wholeMoney(amount_minor) : this.formats.money(amount_minor);
-    return this.signed() && amount_minor > 0 ? `+ ${text}` : text;
+    const write = (figure_minor: MinorUnits) =>
+      this.whole() ? this.formats.wholeMoney(figure_minor) : this.formats.money(figure_minor);
+    return this.signed() ? this.formats.signed(this.amount_minor(), write) : write(this.amount_minor());
   });
 }

@@ -1,0 +1,5 @@
+/** Which estimate the workspace shows. */
+export interface OpenEstimate {
+  readonly jobId: string;
+  readonly estimateId: string;
+}
