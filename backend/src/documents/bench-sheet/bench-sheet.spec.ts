@@ -60,6 +60,7 @@ describe('the bench sheet of a piece', () => {
   it('says once what can hurt, and whom to ask', () => {
     expect(text).toContain('Wood dust, of soft and hard timber alike, is known to cause cancer');
     expect(text.split('animal glue can cause allergy').length - 1).toBe(1);
+    expect(text.split('have a structural engineer check base and fixing').length - 1).toBe(1);
     expect(text).toContain('Follow local codes and the product’s safety data sheet; ask a licensed professional.');
   });
 

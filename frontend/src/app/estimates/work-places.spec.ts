@@ -344,6 +344,12 @@ describe('The places of work', () => {
       });
     });
 
+    it('minds the engineer’s check of a top on its base', async () => {
+      const { element } = await open(DryPage);
+      const told = element.querySelector('aside')?.textContent ?? '';
+      expect(told.match(/structural engineer/g)).toHaveLength(1);
+    });
+
     it('tells each zone’s hands-on time with the waiting of its lot', async () => {
       const { element, store } = await open(DryPage);
       const cells = [...element.querySelectorAll('app-zone-times tbody td')].map((cell) =>
