@@ -1,8 +1,8 @@
 import { chosenDraft } from '#shared/estimates/chosen-draft';
 import type { Choice, Draft } from '#shared/estimates/draft';
 import { estimateWork, type EstimateWork } from '#shared/estimates/estimate-work';
-import { emptyAlternatives, startPrices } from '#shared/estimates/draft-findings';
 import type { CostFigures, Figures, PurchaseFigures } from '#shared/estimates/figures';
+import { emptyAlternatives } from '#shared/estimates/is-empty-alternative';
 import { agreedSum } from '#shared/estimates/price/agreed-sum';
 import { directCost } from '#shared/estimates/price/direct-cost';
 import { priceOf } from '#shared/estimates/price/price-of';
@@ -12,6 +12,7 @@ import { riskOfWork } from '#shared/estimates/risk-of-work';
 import type { RiskInput } from '#shared/estimates/risk/risk-input';
 import type { Risk } from '#shared/estimates/risk/risk';
 import type { EstimateSettings } from '#shared/estimates/settings';
+import { startPrices } from '#shared/estimates/start-prices';
 import { workFigures } from '#shared/estimates/work-figures';
 import { currencyDigits } from '#shared/money/currency-digits';
 import { stagePayments } from '#shared/money/stage-payments';
@@ -137,7 +138,7 @@ export function estimateFigures(prepared: PreparedEstimate, risk: Risk | null): 
   const worked = workFigures(work, draft.settings, input.card);
   return {
     ...worked,
-    findings: [...worked.findings, ...emptyAlternatives(input)],
+    findings: [...worked.findings, ...emptyAlternatives(input.draft)],
     price: price.client,
     stages: stagePayments(price.client.gross_minor, { deposit_percent, stages_percent, retention_percent }),
     cost: costFigures(prepared, price, risk),

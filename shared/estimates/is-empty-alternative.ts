@@ -1,4 +1,5 @@
 import type { Draft } from '#shared/estimates/draft';
+import type { Finding } from '#shared/words/finding';
 
 interface Placed {
   readonly alternativeId: string | null;
@@ -11,3 +12,9 @@ export function isEmptyAlternative({ settings, members }: Draft, id: string): bo
   const parts = members.flatMap(({ zones, ornaments }): readonly Placed[] => [...zones, ...ornaments]);
   return !(leavesOut || holds(members) || holds(settings.extras) || holds(parts));
 }
+
+/** What is said of alternatives with nothing in them, which would be offered at no difference: a warning each, about its id. */
+export const emptyAlternatives = (draft: Draft): Finding[] =>
+  draft.settings.alternatives
+    .filter(({ id }) => isEmptyAlternative(draft, id))
+    .map(({ id, name }) => ({ kind: 'warn', code: 'alternative-empty', values: { name }, about: id }));

@@ -2,13 +2,6 @@ import { readdir } from 'node:fs/promises';
 import { join } from 'node:path';
 import sharp from 'sharp';
 import { changeWorkshop, putLogo, readLogo, readWorkshop, removeLogo } from '#shared/accounts/workshop-endpoints';
-import type { Workshop } from '#shared/accounts/workshop-schema';
-import { readClientIssue } from '#shared/client-page/client-issues-endpoints';
-import type { CostedEstimate } from '#shared/estimates/estimate-schema';
-import { readEstimate } from '#shared/estimates/estimates-endpoints';
-import { clientOf, issueOf } from './sample-client-visit';
-import { sampleEstimate } from './sample-estimate';
-import { sampleDraft } from './sample-invoice';
 import { startApi, type Api } from './start-api';
 import { foundingSettings } from './test-workshop';
 
@@ -65,57 +58,6 @@ test('settings are written from the version seen; from an older one both sides a
   const second = await owner().call(changeWorkshop, { version: seen, body: { ...settings, telephone: '222' } });
   expect(second.status).toBe(412);
   expect(second.body).toMatchObject({ current: { telephone: '111', version: seen + 1 } });
-});
-
-describe('another currency', () => {
-  const read = async (estimateId: string): Promise<CostedEstimate> =>
-    (await api.as('owner').call(readEstimate, { params: { estimateId } })).body as CostedEstimate;
-
-  test('takes the drafts along, worked anew; once something is issued it is refused beside its entry', async () => {
-    const { estimateId } = await sampleEstimate(api.ours);
-    const before = await read(estimateId);
-    expect((await change({ currency: 'JPY' })).status).toBe(200);
-    const after = await read(estimateId);
-    expect([before.currency, after.currency]).toEqual(['EUR', 'JPY']);
-    expect(after.version).toBe(before.version + 1);
-    // Each line is rounded to whole yen where it was rounded to cents.
-    const { net_minor, lines } = after.figures.price;
-    expect(Math.abs(net_minor - before.figures.price.net_minor / 100)).toBeLessThan(lines.length);
-    expect(after.figures.cost.findings.map(({ code }) => code)).toContain('card-start-prices');
-
-    const issueId = await issueOf(api.ours, api, estimateId);
-    const { snapshot } = await api.app.estimates.frozen.read(api.ours.id, issueId);
-    expect([snapshot.workshop.currency, snapshot.figures.price.net_minor]).toEqual(['JPY', net_minor]);
-    const refused = await change({ currency: 'USD' });
-    expect(refused.status).toBe(409);
-    const { errors } = refused.body as { errors: { path: string[]; message: string }[] };
-    expect(errors).toMatchObject([
-      { path: ['currency'], message: expect.stringContaining('have been issued') as string },
-    ]);
-    expect((await read(estimateId)).currency).toBe('JPY');
-  });
-
-  test('is refused once there is an invoice', async () => {
-    await sampleDraft(api.theirs);
-    const { visitor } = api.theirs.people.owner;
-    const { version, id: _id, logoFileId: _logo, ...own } = (await visitor.call(readWorkshop)).body as Workshop;
-    const refused = await visitor.call(changeWorkshop, { version, body: { ...own, currency: 'SEK' } });
-    expect([refused.status, (refused.body as { errors: { path: string[] }[] }).errors[0].path]).toEqual([
-      409,
-      ['currency'],
-    ]);
-  });
-
-  test('an issue freezes the currency of its estimate, and its client reads it in that', async () => {
-    const { estimateId } = await sampleEstimate(api.theirs);
-    await api.platform.database.execute("UPDATE workshops SET currency = 'USD' WHERE id = :id", { id: api.theirs.id });
-    const issueId = await issueOf(api.theirs, api, estimateId);
-    const { snapshot } = await api.app.estimates.frozen.read(api.theirs.id, issueId);
-    expect(snapshot.workshop.currency).toBe('EUR');
-    const client = await clientOf(api.theirs, api, issueId);
-    const { body } = await client.call(readClientIssue, { params: { issueId } });
-    expect(body).toMatchObject({ letterhead: { currency: 'EUR' }, issue: { currency: 'EUR' } });
-  });
 });
 
 describe('a picture', () => {

@@ -30,6 +30,7 @@ export interface MeasuredWork {
 export const paidUnits = ['m²', 'ft²'] as const;
 export type PaidUnit = (typeof paidUnits)[number];
 
+/** The unit a workshop's quantities are paid in, by its unit of length: ft² with inches, else m². */
 export const paidUnitOf = (lengthUnit: LengthUnit): PaidUnit => (lengthUnit === 'in' ? 'ft²' : 'm²');
 
 function workOf({ rule, length, girth, area, sides, worth }: MeasuredWork): PaidWork | null {

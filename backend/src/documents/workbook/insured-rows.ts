@@ -2,7 +2,7 @@ import { insuredValue } from '#shared/estimates/price/insured-work';
 import { sumMinor } from '#shared/money/sum-minor';
 import { taxNumber } from './tax-number';
 import { priceOfCostFormula } from './price-formula';
-import { agreedCells } from './agreed-price';
+import { agreedCells } from './agreed-cells';
 import { amountOf } from './line-rows';
 import type { PricePage } from './price-sources';
 import { minorOfAmount, roundedAmount } from './rounded';

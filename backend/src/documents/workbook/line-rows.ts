@@ -1,5 +1,5 @@
 import { textOf } from '#shared/money/text-of';
-import { agreedCells } from './agreed-price';
+import { agreedCells } from './agreed-cells';
 import { taxNumber } from './tax-number';
 import {
   directFormula,

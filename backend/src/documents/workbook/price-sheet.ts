@@ -1,5 +1,5 @@
 import { exactMinor } from '#shared/money/minor-of';
-import { setAgreedThreshold } from './agreed-price';
+import { setAgreedThreshold } from './agreed-cells';
 import { costRows } from './cost-rows';
 import { insuredRows } from './insured-rows';
 import type { NameBook } from './name-book';

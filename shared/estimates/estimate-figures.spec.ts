@@ -1,4 +1,5 @@
-import { emptyAlternatives, startPrices } from '#shared/estimates/draft-findings';
+import { emptyAlternatives } from '#shared/estimates/is-empty-alternative';
+import { startPrices } from '#shared/estimates/start-prices';
 import type { EstimateInput } from '#shared/estimates/estimate-figures';
 import { estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
 import type { EstimateSettings } from '#shared/estimates/settings';
@@ -52,7 +53,7 @@ describe('what is said of a draft before its price', () => {
         price: '9',
       },
     ] as const;
-    const found = emptyAlternatives(input({}, { ...settings, extras }));
+    const found = emptyAlternatives(input({}, { ...settings, extras }).draft);
     expect(found.map(({ kind, code, about }) => [kind, code, about])).toEqual([['warn', 'alternative-empty', 'bare']]);
   });
 });

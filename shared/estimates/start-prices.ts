@@ -1,14 +1,7 @@
 import type { EstimateInput } from '#shared/estimates/estimate-figures';
-import { isEmptyAlternative } from '#shared/estimates/is-empty-alternative';
 import { startLeaf } from '#shared/leaf/start-leaf';
 import { startCurrency, startMoney } from '#shared/rate-cards/start-money';
 import type { Finding } from '#shared/words/finding';
-
-/** An alternative with nothing in it would be offered at no difference. */
-export const emptyAlternatives = ({ draft }: EstimateInput): Finding[] =>
-  draft.settings.alternatives
-    .filter(({ id }) => isEmptyAlternative(draft, id))
-    .map(({ id, name }) => ({ kind: 'warn', code: 'alternative-empty', values: { name }, about: id }));
 
 interface Priced {
   readonly id: string;
