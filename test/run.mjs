@@ -1,6 +1,6 @@
 /** Runs every check there is, one after the other, and ends with one plain line: how many passed, how many failed. */
 import { spawn } from 'node:child_process';
-import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync } from 'node:fs';
+import { closeSync, existsSync, mkdirSync, openSync, readdirSync, readFileSync, rmSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 
@@ -16,9 +16,9 @@ const onTheBuiltApplication = ['test/start', 'test/journeys'];
 const say = (text) => console.log(`\n— ${text}`);
 
 /** Runs a program in its own process group and answers its exit code; ends the whole group when time is up. */
-function run([program, ...args], limit_minutes) {
+function run([program, ...args], limit_minutes, said = 'inherit') {
   return new Promise((resolve) => {
-    const child = spawn(program, args, { cwd: root, stdio: 'inherit', detached: true });
+    const child = spawn(program, args, { cwd: root, stdio: ['inherit', said, said], detached: true });
     const late = setTimeout(() => {
       say(`not done within ${limit_minutes} minutes`);
       process.kill(-child.pid, 'SIGKILL');
@@ -34,11 +34,15 @@ function run([program, ...args], limit_minutes) {
 /** The npm that runs this, or else the one that is found. */
 const npm = process.env.npm_execpath ? [process.execPath, process.env.npm_execpath] : ['npm'];
 
+/** What it has to say comes in one piece, since several run side by side. */
 async function check(script) {
+  const report = join(root, '.cache', `${script.replaceAll(':', '-')}.txt`);
+  const said = openSync(report, 'w');
+  const code = await run([...npm, 'run', '--silent', script], 10, said);
+  closeSync(said);
   say(script);
-  return (await run([...npm, 'run', '--silent', script], 10)) === 0
-    ? { passed: 1, failed: 0 }
-    : { passed: 0, failed: 1 };
+  process.stdout.write(readFileSync(report));
+  return code === 0 ? { passed: 1, failed: 0 } : { passed: 0, failed: 1 };
 }
 
 /** Counts what Jest reports; a file that does not run is a failure, and so is a test that was left out. */
@@ -54,7 +58,6 @@ function countsOf(report, code) {
 async function jest(name, args, limit_minutes) {
   say(name);
   const report = join(root, '.cache', `${name.replaceAll(' ', '-')}.json`);
-  mkdirSync(dirname(report), { recursive: true });
   rmSync(report, { force: true });
   const reporting = ['--json', `--outputFile=${report}`, `--testTimeout=${testLimit_milliseconds}`];
   const code = await run([process.execPath, 'node_modules/jest/bin/jest.js', ...reporting, ...args], limit_minutes);
@@ -67,11 +70,10 @@ const hasSpecs = (folder) =>
 
 async function runAll() {
   const later = onTheBuiltApplication.filter(hasSpecs);
-  const results = [];
-  for (const script of ['check:types', 'check:lint', 'check:layers']) results.push(await check(script));
+  mkdirSync(join(root, '.cache'), { recursive: true });
+  const results = await Promise.all(['check:types', 'check:lint', 'check:layers'].map(check));
   results.push(await jest('specifications', later.length > 0 ? ['--ignoreProjects', ...later] : [], 20));
-  if (later.length > 0)
-    results.push(await jest('the built application', ['--runInBand', '--selectProjects', ...later], 20));
+  if (later.length > 0) results.push(await jest('the built application', ['--selectProjects', ...later], 20));
   return results;
 }
 

@@ -1,5 +1,5 @@
-import type { EstimateInput } from '#shared/estimates/estimate-figures';
 import { startLeaf } from '#shared/leaf/start-leaf';
+import type { RateCard } from '#shared/rate-cards/rate-card';
 import { startCurrency, startMoney } from '#shared/rate-cards/start-money';
 import type { Finding } from '#shared/words/finding';
 
@@ -16,7 +16,7 @@ function isUntouched(prices: readonly Priced[], start: readonly Priced[]): boole
 }
 
 /** Prices a workshop starts from are in one currency; in any other they are figures nobody has looked at. */
-export function startPrices({ card, currency }: EstimateInput): Finding[] {
+export function startPrices({ card, currency }: { readonly card: RateCard; readonly currency: string }): Finding[] {
   if (currency === startCurrency) return [];
   const rates = (grades: typeof card.money.grades) => grades.map(({ id, costPerHour }) => ({ id, price: costPerHour }));
   const leaf = (products: typeof card.leaf.products) => products.map(({ id, price }) => ({ id, price }));

@@ -26,7 +26,9 @@ export const percentEntry = z.number().min(0).max(100);
 export const lossEntry = z.number().min(0).max(90);
 
 /** A decimal of at least 0 written as text: up to 9 digits and 6 decimals, with a full stop. */
-export const decimalEntry = z.string().regex(/^\d{1,9}(\.\d{1,6})?$/, { abort: true, ...complain('entry-not-decimal') });
+export const decimalEntry = z
+  .string()
+  .regex(/^\d{1,9}(\.\d{1,6})?$/, { abort: true, ...complain('entry-not-decimal') });
 
 /** A decimal above 0 written as text. */
 export const positiveDecimalEntry = decimalEntry.refine(

@@ -325,7 +325,12 @@ describe('work paid by a measuring rule', () => {
 
   // White: 60 yd worth three times plain are paid as 180 yd; at 0.20 a yard that is 36.00.
   it('comes to three times the rate for special work worth three times the plain', () => {
-    const paid = paidFor({ ...nothing, rule: 'weighted', area: { text: 'as measured', mm2: 60 * 9 * 92_903.04 }, worth: 3 });
+    const paid = paidFor({
+      ...nothing,
+      rule: 'weighted',
+      area: { text: 'as measured', mm2: 60 * 9 * 92_903.04 },
+      worth: 3,
+    });
     const yards = Number(paid && paidText(paid, 'ft²')) / 9;
     expect(lineAmount({ quantity: String(yards), price: '0.20' }, 2)).toBe(36_00);
   });

@@ -30,7 +30,7 @@ describe('PaymentsPage', () => {
   });
 
   it('names what went back and what came back, and offers nothing to be given back of those', async () => {
-    const beside = { refundsPaymentId: invoiceId(40), way: 'card', shares: [], credit_minor: 0 } as const;
+    const beside = { refundsPaymentId: invoiceId(40), way: 'card' as const, shares: [], credit_minor: 0 };
     const visit = await shown([
       payment({ ...beside, id: invoiceId(41), deed: 'refund', amount_minor: -10_00 }),
       payment({ ...beside, id: invoiceId(42), deed: 'refund-failed', amount_minor: 10_00 }),

@@ -39,8 +39,7 @@ describe('ClientPage', () => {
   };
   const button = (text: string) =>
     [...element().querySelectorAll('button')].find((one) => one.textContent?.trim() === text);
-  const entry = (name: string) =>
-    element().querySelector<HTMLInputElement>(`[name=${name}]`) as HTMLInputElement;
+  const entry = (name: string) => element().querySelector<HTMLInputElement>(`[name=${name}]`) as HTMLInputElement;
 
   async function open(given: Client) {
     TestBed.configureTestingModule({

@@ -35,8 +35,7 @@ describe('JobForm', () => {
   };
   const button = (text: string) =>
     [...element().querySelectorAll('button')].find((one) => one.textContent?.trim() === text);
-  const entry = (name: string) =>
-    element().querySelector<HTMLInputElement>(`[name=${name}]`) as HTMLInputElement;
+  const entry = (name: string) => element().querySelector<HTMLInputElement>(`[name=${name}]`) as HTMLInputElement;
   const clientEntry = () => element().querySelector<HTMLInputElement>('app-client-field input') as HTMLInputElement;
   const type = (target: HTMLInputElement, text: string) => {
     target.value = text;

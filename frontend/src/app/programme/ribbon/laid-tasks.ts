@@ -2,12 +2,7 @@ import type { MomentSpan } from '#shared/programme/shop-calendar';
 import { ribbonBar } from './ribbon-bar';
 import type { RibbonLot, RibbonTask } from './ribbon-lot';
 import { pixelOf, type RibbonScale } from './ribbon-scale';
-
-/** A stretch along a line, in pixels. */
-export interface Stretch {
-  readonly x: number;
-  readonly width: number;
-}
+import type { Stretch } from './stretch';
 
 /** A task in pixels. */
 export interface DrawnTask {

@@ -1,4 +1,4 @@
-import type { Stretch } from './laid-tasks';
+import type { Stretch } from './stretch';
 
 /** Where a bar stands on its line, and how round its corners are; pixels. */
 export interface BarShape {

@@ -3,7 +3,8 @@ import type { Day } from '#shared/calendar/day';
 import { weekdayOf } from '#shared/calendar/working-days';
 import { minutesOfDay, type ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { MomentSpan } from '#shared/programme/shop-calendar';
-import type { DrawnPart, Stretch } from './laid-tasks';
+import type { DrawnPart } from './laid-tasks';
+import type { Stretch } from './stretch';
 import { pixelOf, type RibbonScale } from './ribbon-scale';
 
 /** What a mark at the head of the ribbon says: a day, a week by its Monday, a month by its first, or an hour. */

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { ribbonBar } from './ribbon-bar';
-import type { DrawnLot, DrawnTask, Stretch } from './laid-tasks';
+import type { DrawnLot, DrawnTask } from './laid-tasks';
+import type { Stretch } from './stretch';
 
 const dryingBar = { y: 14, height: 26, radius: 0 };
 const windowBar = { y: 9, height: 36, radius: 6 };

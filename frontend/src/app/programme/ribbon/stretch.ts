@@ -1,0 +1,5 @@
+/** A stretch along a line, in pixels. */
+export interface Stretch {
+  readonly x: number;
+  readonly width: number;
+}
