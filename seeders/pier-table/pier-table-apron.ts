@@ -43,7 +43,7 @@ function sideApron(): MemberEntry {
     relief: 'high',
     recutting: 'plain',
   });
-  const ground = zoneEntry('Ground, diaper', { ...shareOf(40), ...matte, relief: 'low', recutting: 'plain' });
+  const ground = zoneEntry('Ground', { ...shareOf(40), ...matte, relief: 'low', recutting: 'plain' });
   return memberEntry(
     'Side apron',
     { kind: 'rectangle', length_mm: 355.6, height_mm: 152.4 },
@@ -53,7 +53,7 @@ function sideApron(): MemberEntry {
       ornaments: [
         ornamentEntry('acanthus-leaf', pieces(2), { zone: carving, size_mm: 80 }),
         ornamentEntry('rosette', pieces(1), { zone: carving, size_mm: 56 }),
-        ornamentEntry('diaper', squareDecimetres(1.8), { zone: ground, relief: 'low' }),
+        ornamentEntry('plain-ground-lowered', squareDecimetres(1.8), { zone: ground, relief: 'low' }),
       ],
       typed: { 'shape.length_mm': '14 in', 'shape.height_mm': '6 in' },
     },
@@ -75,7 +75,7 @@ function shell(): MemberEntry {
       zones: [face],
       ornaments: [
         ornamentEntry('clay-model', pieces(1)),
-        ornamentEntry('shell', pieces(1), { zone: face, size_mm: 110, relief: 'high', isUndercut: true }),
+        ornamentEntry('shell', pieces(1), { zone: face, size_mm: 100, relief: 'high', isUndercut: true }),
       ],
     },
   );
@@ -87,7 +87,7 @@ function swag(): MemberEntry {
     'Swag below the apron',
     {
       kind: 'measured',
-      area_mm2: 28_000,
+      area_mm2: 24_000,
       uncertainty_mm2: 4_000,
       note: 'Strips of paper over the drawing at full size.',
       isTrueSurface: true,
@@ -95,7 +95,7 @@ function swag(): MemberEntry {
     {
       count: 2,
       zones: [whole],
-      ornaments: [ornamentEntry('swag', pieces(1), { zone: whole, size_mm: 240, relief: 'high' })],
+      ornaments: [ornamentEntry('swag', pieces(1), { zone: whole, size_mm: 200, relief: 'high' })],
     },
   );
 }
@@ -103,9 +103,10 @@ function swag(): MemberEntry {
 function topMoulding(): MemberEntry {
   const enriched = zoneEntry('Egg and dart', {
     ...partsOf('ovolo'),
-    ...burnishedAndMatte,
+    ...burnished,
     relief: 'middle',
     recutting: 'plain',
+    laying: { way: 'patches', strips: null, cuts: 2 },
   });
   const plain = zoneEntry('Fillets and cavetto', { ...partsOf('fillet', 'cavetto', 'top-fillet'), ...matte });
   return memberEntry(

@@ -3,27 +3,27 @@ import { alternativeEntry } from '../entries/alternative-entry';
 import { memberEntry, type MemberEntry } from '../entries/member-entry';
 import { ornamentEntry, pieces, run, squareDecimetres } from '../entries/ornament-entry';
 import { shareOf, zoneEntry } from '../entries/zone-entry';
-import { burnishedAndMatte, matte, sealed, tonedBack } from './pier-table-finishes';
+import { burnished, burnishedAndMatte, matte, sealed, tonedBack } from './pier-table-finishes';
 
 function frontLeg(): MemberEntry {
+  const shaft = zoneEntry('Shaft and scroll', { ...shareOf(50), ...matte, relief: 'middle', recutting: 'plain' });
   const knee = zoneEntry('Knee, acanthus', {
     ...shareOf(50),
     ...burnishedAndMatte,
-    relief: 'high',
+    relief: 'middle',
     recutting: 'plain',
   });
-  const shaft = zoneEntry('Shaft and scroll', { ...shareOf(50), ...matte, relief: 'middle', recutting: 'plain' });
   return memberEntry(
     'Front leg',
     { kind: 'cabriole', length_mm: 736.6, girths_mm: [420, 410, 345, 285, 250, 245, 310] },
     {
       count: 2,
-      zones: [knee, shaft],
+      zones: [shaft, knee],
       ornaments: [
         ornamentEntry('leg-from-block', pieces(1)),
         ornamentEntry('acanthus-leaf', pieces(1), { zone: knee, size_mm: 140 }),
         ornamentEntry('acanthus-leaf', pieces(2), { zone: knee, size_mm: 80, isMirrored: true, joinsLearning: true }),
-        ornamentEntry('husk', pieces(4), { zone: shaft, size_mm: 40 }),
+        ornamentEntry('husk', pieces(3), { zone: shaft, size_mm: 40 }),
       ],
       typed: { 'shape.length_mm': '29 in' },
       note: 'Left and right are a pair; girths taken with a paper strip at seven stations.',
@@ -52,10 +52,7 @@ function backLeg(): { member: MemberEntry; alternative: Alternative } {
     {
       count: 2,
       zones: [gilt, toned],
-      ornaments: [
-        ornamentEntry('leg-from-block', pieces(1)),
-        ornamentEntry('fluting', run(480, { runs: 2 }), { zone: gilt, relief: 'low' }),
-      ],
+      ornaments: [ornamentEntry('fluting', run(480, { runs: 2 }), { zone: gilt, relief: 'low' })],
       typed: { 'shape.length_mm': '29 in' },
     },
   );
@@ -63,7 +60,7 @@ function backLeg(): { member: MemberEntry; alternative: Alternative } {
 }
 
 function legBlock(): MemberEntry {
-  const faces = zoneEntry('Faces, sunk panel', { ...burnishedAndMatte, relief: 'low', recutting: 'plain' });
+  const faces = zoneEntry('Faces, sunk panel', { ...burnished, relief: 'low', recutting: 'plain' });
   return memberEntry(
     'Leg block',
     {
@@ -92,7 +89,7 @@ function patera(): MemberEntry {
 }
 
 function foot(): MemberEntry {
-  const ball = zoneEntry('Ball, reeded below', { ...burnishedAndMatte, relief: 'low', finish: 'carved', ...sealed });
+  const ball = zoneEntry('Ball, reeded below', { ...burnished, relief: 'low', finish: 'carved', ...sealed });
   return memberEntry(
     'Ball foot',
     { kind: 'ball-foot', diameter_mm: 82, cutTop_mm: 9, cutBottom_mm: 5, ends: { top: false, bottom: false } },

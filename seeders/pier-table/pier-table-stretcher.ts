@@ -12,17 +12,23 @@ function arm(): MemberEntry {
     relief: 'middle',
     recutting: 'plain',
   });
-  const scroll = zoneEntry('Scroll', { ...shareOf(50), ...matte, ...sealed, relief: 'low', recutting: 'plain' });
+  const scroll = zoneEntry('Scroll', {
+    ...shareOf(50),
+    ...burnishedAndMatte,
+    ...sealed,
+    relief: 'low',
+    recutting: 'plain',
+  });
   return memberEntry(
     'Stretcher arm',
     {
       kind: 'stations',
       stations: [
-        { at_mm: 0, girth_mm: 190 },
-        { at_mm: 110, girth_mm: 212 },
-        { at_mm: 260, girth_mm: 200 },
-        { at_mm: 420, girth_mm: 184 },
-        { at_mm: 505, girth_mm: 226 },
+        { at_mm: 0, girth_mm: 178 },
+        { at_mm: 110, girth_mm: 202 },
+        { at_mm: 260, girth_mm: 188 },
+        { at_mm: 420, girth_mm: 172 },
+        { at_mm: 505, girth_mm: 214 },
       ],
     },
     {

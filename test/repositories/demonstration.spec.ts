@@ -89,6 +89,44 @@ describe('The demonstration', () => {
   });
 });
 
+describe('The pier-table base of the demonstration', () => {
+  /** A moderately ornamented lime base of about 2.15 m² plan and 2.7 m² true; one carver, one gilder, leaf of 80 mm. Common practice, no source. */
+  const believable = {
+    plan_m2: [2.1, 2.2],
+    true_m2: [2.6, 2.85],
+    carving_hours: [170, 200],
+    gilding_hours: [95, 115],
+    gildingWithSetUp_hours: [95, 115],
+    booklets: [33, 39],
+    weeks: [8, 9],
+    net_euros: [21_000, 25_000],
+  } as const;
+
+  async function issued(): Promise<Record<keyof typeof believable, number>> {
+    const { tally, members, grades, price } = thawedSnapshot((await issuesOf())[0]).figures;
+    const gilders = grades.filter(({ gradeId }) => gradeId === 'gilder' || gradeId === 'finisher');
+    return {
+      plan_m2: members.reduce((sum, { plan_mm2 }) => sum + plan_mm2, 0) / 1e6,
+      true_m2: tally.true_mm2 / 1e6,
+      carving_hours: tally.carving_hours.likely,
+      gilding_hours: tally.handsOn_hours.likely,
+      gildingWithSetUp_hours: gilders.reduce((sum, { hours }) => sum + hours, 0),
+      booklets: tally.booklets,
+      weeks: tally.weeks,
+      net_euros: price.net_minor / 100,
+    };
+  }
+
+  it('comes out as such a base does at the bench', async () => {
+    const figures = await issued();
+    const outside = Object.entries(believable).filter(([name, [least, most]]) => {
+      const figure = figures[name as keyof typeof believable];
+      return !(figure > least && figure < most);
+    });
+    expect(outside).toEqual([]);
+  });
+});
+
 describe('An issue worked again from what it froze', () => {
   it('gives the figures it was issued with, to the cent', async () => {
     const issues = await issuesOf();
