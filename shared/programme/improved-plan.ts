@@ -1,10 +1,12 @@
 import { seededGenerator, type Generator32 } from '#shared/estimates/risk/seeded-generator';
 import { serialResult, type BlockedNetwork, type PlanHints } from '#shared/programme/serial-result';
+import { holdLengthsOf, isRoomPromised } from '#shared/programme/hold-lengths-of';
 import { mirroredNetwork } from '#shared/programme/mirrored-network';
+import { planBreaches } from '#shared/programme/plan-breaches';
 import type { SearchLimit } from '#shared/programme/project';
 import { taskBlocks } from '#shared/programme/task-blocks';
 import { earliestTimes } from '#shared/programme/earliest-times';
-import type { Position } from '#shared/programme/task-network';
+import type { Position, TaskNetwork } from '#shared/programme/task-network';
 
 /** A plan in places of a network, with the moment all of it is done. */
 export interface NetworkPlan {
@@ -46,14 +48,30 @@ function blocksBackward({ network }: BlockedNetwork, finish: number): BlockedNet
   return taskBlocks(mirror, earliestTimes(mirror).starts);
 }
 
+/** Where room is promised elsewhere, how long each hold lasts in a plan: without it nothing would fit in before the last promise. */
+export const roomHints = (network: TaskNetwork, positions: readonly Pick<Position, 'start' | 'end'>[]): PlanHints =>
+  isRoomPromised(network) ? { lengths: holdLengthsOf(network, positions) } : {};
+
+/** A plan in an order, holds as long as in the plan before it; null where there is none that keeps every rule. */
+function replanned(blocked: BlockedNetwork, order: readonly number[], hints: PlanHints): readonly Position[] | null {
+  const { positions } = serialResult(blocked, order, hints);
+  // Lengths are guesses, so what is planned by them is looked at again.
+  return positions && hints.lengths && planBreaches(blocked.network, positions).length > 0 ? null : positions;
+}
+
 /** The order in which a plan stands when everything is put off as far as its finish allows (double justification of Valls, Ballestín, Quintanilla 2005, from memory). */
 function justified(
   { network }: BlockedNetwork,
   blocks: BlockedNetwork['blocks'],
   plan: NetworkPlan,
 ): readonly number[] | null {
-  const ends = plan.positions.map(({ end }) => -end);
-  const { positions } = serialResult({ network: mirroredNetwork(network, plan.finish), blocks }, ends);
+  const mirror = mirroredNetwork(network, plan.finish);
+  const seenBack = plan.positions.map(({ start, end }) => ({ start: -end, end: -start }));
+  const { positions } = serialResult(
+    { network: mirror, blocks },
+    seenBack.map(({ start }) => start),
+    roomHints(mirror, seenBack),
+  );
   return positions && positions.map(({ end }) => -end);
 }
 
@@ -93,7 +111,8 @@ export function improvedPlan(
     plans += 1;
     const order = isSettled ? null : justified(blocked, backward, current);
     const shake = { share: shares[plans % shares.length], lots: plans % 2 === 0 ? improving.lots : null };
-    const { positions } = serialResult(blocked, order ?? shaken(best, shake, next), improving.hints);
+    const hints = { ...roomHints(blocked.network, current.positions), ...improving.hints };
+    const positions = replanned(blocked, order ?? shaken(best, shake, next), hints);
     isSettled = !positions;
     if (!positions) continue;
     const plan = networkPlan(positions);

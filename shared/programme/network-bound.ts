@@ -56,7 +56,7 @@ function hasHours(network: TaskNetwork, { tasks, works, people }: WorkPool, { st
     let work = 0;
     return order.every((at, place) => {
       if (starts[tasks[at]] >= from) work += works[at];
-      return work <= by[place] - before;
+      return work === 0 || work <= by[place] - before;
     });
   });
 }

@@ -271,6 +271,48 @@ describe('A programme', () => {
     });
   });
 
+  describe('with a rack that others have been promised', () => {
+    const onRack = (from_minutes: number, until_minutes: number): ProgrammeRequest =>
+      requestForSpecs({
+        tasks: [taskForSpecs('gesso'), taskForSpecs('bole')],
+        lags: [lagForSpecs('gesso', 'bole', { least: 1380 })],
+        places: [
+          {
+            ...{ id: 'rack', name: 'Rack', capacity: 1 },
+            taken: [{ start_minutes: from_minutes, end_minutes: until_minutes, amount: 1 }],
+          },
+        ],
+        placeHolds: [{ placeId: 'rack', amount: 1, fromTaskId: 'gesso', untilTaskId: 'bole' }],
+      });
+
+    it('stands a lot there before them, where it is off it in time', () => {
+      const plan = programme(onRack(at(14, 0), at(25, 0)));
+      expect([plan.status, timesOf(plan, 'gesso'), timesOf(plan, 'bole')]).toEqual([
+        'optimal',
+        [at(0, 8), at(0, 9)],
+        [at(1, 8), at(1, 9)],
+      ]);
+      // Off the rack by the next morning at 9 and not by 8: after that there is no room until the third day.
+      const tight = programme(onRack(at(1, 8), at(2, 0)));
+      expect(timesOf(tight, 'gesso')).toEqual([at(2, 8), at(2, 9)]);
+    });
+
+    it('backward begins as late as it may all the same', () => {
+      const plan = programme(onRack(0, at(0, 12)), { backwardFrom_minutes: at(4, 17) });
+      expect([timesOf(plan, 'gesso'), timesOf(plan, 'bole'), plan.findings]).toEqual([
+        [at(3, 16), at(3, 17)],
+        [at(4, 16), at(4, 17)],
+        [],
+      ]);
+    });
+
+    it('says when nothing but the earliest plan is done by then', () => {
+      const plan = programme(onRack(at(1, 9), at(9, 0)), { backwardFrom_minutes: at(4, 17) });
+      expect(timesOf(plan, 'gesso')[0]).toBe(at(0, 8));
+      expect(plan.findings.map(({ code }) => code)).toEqual(['programme-only-early']);
+    });
+  });
+
   it('knows what is critical and how much later the rest could start', () => {
     const tasks = [
       taskForSpecs('carve', { gradeId: 'carver', handsOn_minutes: 120 }),

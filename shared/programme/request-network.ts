@@ -1,11 +1,13 @@
 import { serialResult, type BlockedNetwork, type SerialResult } from '#shared/programme/serial-result';
 import { earliestTimes, type EarliestTimes } from '#shared/programme/earliest-times';
 import { networkPlan } from '#shared/programme/improved-plan';
+import { holdLengthsOf, isRoomPromised } from '#shared/programme/hold-lengths-of';
 import { mirroredNetwork } from '#shared/programme/mirrored-network';
 import { daysUntil, networkOf } from '#shared/programme/network-of';
+import { planBreaches } from '#shared/programme/plan-breaches';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
 import { taskBlocks } from '#shared/programme/task-blocks';
-import type { NetworkArc, TaskNetwork } from '#shared/programme/task-network';
+import { taskNetwork, type NetworkArc, type TaskNetwork } from '#shared/programme/task-network';
 
 /** A request ready to be planned, with its earliest times by lags and calendars alone. */
 export interface RequestNetwork extends BlockedNetwork {
@@ -76,9 +78,10 @@ export interface FirstResult {
   readonly endless: NetworkArc | null;
 }
 
+const finish = ({ positions }: SerialResult): number => (positions ? networkPlan(positions).finish : Infinity);
+
 /** The best of the first orders, or the first of them that comes to a plan, where all that is asked is whether there is one. */
 function orderedResult(ready: RequestNetwork, asked: 'best' | 'any'): SerialResult {
-  const finish = ({ positions }: SerialResult): number => (positions ? networkPlan(positions).finish : Infinity);
   let best: SerialResult | null = null;
   for (const order of firstOrders(ready)) {
     const result = serialResult(ready, order);
@@ -87,6 +90,29 @@ function orderedResult(ready: RequestNetwork, asked: 'best' | 'any'): SerialResu
   }
   if (!best) throw new RangeError('there is always an order to begin with');
   return best;
+}
+
+const withoutPromises = (network: TaskNetwork): TaskNetwork =>
+  taskNetwork({ ...network, places: network.places.map((place) => ({ ...place, taken: [] })) });
+
+/**
+ * A plan between what rooms are promised for elsewhere: it is planned as though nothing were, which tells how long each hold lasts, and then again in that
+ * order. Null where that comes to no plan.
+ */
+function resultBetweenPromises(ready: RequestNetwork, asked: 'best' | 'any'): SerialResult | null {
+  const network = withoutPromises(ready.network);
+  const { positions } = orderedResult({ ...ready, network }, asked);
+  if (!positions) return null;
+  const order = positions.map(({ start }) => start);
+  const result = serialResult(ready, order, { lengths: holdLengthsOf(network, positions) });
+  return result.positions && planBreaches(ready.network, result.positions).length === 0 ? result : null;
+}
+
+function bestResult(ready: RequestNetwork, asked: 'best' | 'any'): SerialResult {
+  const ordered = orderedResult(ready, asked);
+  if (!isRoomPromised(ready.network) || (asked === 'any' && ordered.positions)) return ordered;
+  const between = resultBetweenPromises(ready, asked);
+  return between && finish(between) < finish(ordered) ? between : ordered;
 }
 
 function firstOver(ready: RequestNetwork, asked: 'best' | 'any'): FirstResult {
@@ -98,7 +124,7 @@ function firstOver(ready: RequestNetwork, asked: 'best' | 'any'): FirstResult {
       result: { positions: null, failure: { task: failed.to, arc: failed, isHeld: false } },
     };
   }
-  return { ready, result: orderedResult(ready, asked), endless: null };
+  return { ready, result: bestResult(ready, asked), endless: null };
 }
 
 /** How far a calendar is needed at the least, and whether any plan will do. */

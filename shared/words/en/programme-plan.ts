@@ -23,6 +23,8 @@ export const programmePlan = {
   'programme-window-missed':
     'The time of {task} is over before {next} can be done. See what the trade does when it was missed, and have somebody look at it.',
   'programme-too-late': 'This cannot be done by then: begun at once it is done {late_minutes} later.',
+  'programme-only-early':
+    'This is the plan that begins as early as it may: none was found that begins later and is still done by then.',
   'programme-remedy-other-size': 'With {size} instead.',
   'programme-remedy-portions':
     'With {task} and what is tied to it in {portions, plural, one {# portion} other {# portions}}.',
