@@ -158,6 +158,32 @@ function peopleMayCall(endpoint: Endpoint): void {
   if (endpoint.callers !== 'anyone') keepsWorkshopsApart(asked);
 }
 
+/** How a link closes: it ends by its day, or is taken back. */
+const closings = [
+  ['ended', 'ends_at = DATE_SUB(ends_at, INTERVAL 10 YEAR)'],
+  ['was taken back', 'revoked_at = created_at'],
+] as const;
+
+/** Every link of ours is closed while it is asked, and open again afterwards, so that whoever is refused is the one who is answered. */
+async function withLinksClosed<T>(closing: string, ask: () => Promise<T>): Promise<T> {
+  const { database } = api.platform;
+  const own = { workshopId: api.ours.id };
+  const kept = await database.select<{ id: string; endsAt: Date; revokedAt: Date | null }>(
+    'SELECT id, ends_at AS endsAt, revoked_at AS revokedAt FROM client_accesses WHERE workshop_id = :workshopId',
+    own,
+  );
+  await database.execute(`UPDATE client_accesses SET ${closing} WHERE workshop_id = :workshopId`, own);
+  try {
+    return await ask();
+  } finally {
+    for (const access of kept)
+      await database.execute(
+        'UPDATE client_accesses SET ends_at = :endsAt, revoked_at = :revokedAt WHERE workshop_id = :workshopId AND id = :id',
+        { ...own, ...access },
+      );
+  }
+}
+
 /** What clients may call: their own workshop's people are strangers to it, and so is any other client. */
 function clientsMayCall(endpoint: Endpoint): void {
   const row = clientRows[endpoint.name];
@@ -182,6 +208,13 @@ function clientsMayCall(endpoint: Endpoint): void {
       if (endpoint.params !== undefined || row.namesRows) expect(response.status).toBe(404);
       expect(bytesOf(response)).not.toContain(canary);
     }
+  });
+
+  test.each(closings)('refuses whoever came by a link that %s, and nothing changes', async (_, closing) => {
+    const response = await withLinksClosed(closing, () =>
+      unchanged(401, () => ready.visitor.call(endpoint, ready.parts)),
+    );
+    expect(bytesOf(response)).not.toContain(api.ours.mark);
   });
 
   if (!isSafe(endpoint)) {

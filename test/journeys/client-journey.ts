@@ -1,6 +1,8 @@
 import { createHash } from 'node:crypto';
 import type { Page } from 'playwright-core';
 import type { CaughtMail } from '../../backend/src/platform/mail/mail-catcher';
+import type { SampleIssue } from '../api/sample-client-visit';
+import type { Screen } from './screens';
 import type { Person, Walk } from './walk';
 
 /** The phone a client reads on. */
@@ -13,6 +15,12 @@ export async function mailTo({ api }: Walk, email: string): Promise<CaughtMail> 
   return mail;
 }
 
+/** The address kept of the client of an issue. */
+export async function emailOf({ api }: Walk, { jobId }: SampleIssue): Promise<string> {
+  const { clientId } = await api.app.jobs.job(api.ours.id, jobId);
+  return (await api.app.jobs.client(api.ours.id, clientId)).email;
+}
+
 /** Where the link of a mail leads, on the server of this walk. */
 export function linkOf({ address }: Walk, { text }: CaughtMail): string {
   const link = new URL(/https?:\/\/\S+#\S+/.exec(text)?.[0] ?? 'about:blank');
@@ -20,7 +28,7 @@ export function linkOf({ address }: Walk, { text }: CaughtMail): string {
 }
 
 /** Somebody who opens the link of a letter on their own phone, and where it led them. */
-export async function clientAt(walk: Walk, link: string, screen = pocket): Promise<Person> {
+export async function clientAt(walk: Walk, link: string, screen: Screen = pocket): Promise<Person> {
   const person = await walk.stranger(screen);
   await person.page.goto(link);
   await person.page.waitForURL(/\/client\/issues\//);

@@ -12,7 +12,7 @@ import {
 } from '../api/sample-client-visit';
 import { sampleMember } from '../api/sample-estimate';
 import { v7 as newId } from 'uuid';
-import { clientAt, hashAt, linkOf, mailTo, reviewAs, seenButton } from './client-journey';
+import { clientAt, emailOf, hashAt, linkOf, mailTo, reviewAs, seenButton } from './client-journey';
 import { Keyboard } from './keyboard';
 import { screens, turnTo } from './screens';
 import { done } from './stage';
@@ -29,11 +29,6 @@ afterAll(() => walk.end());
 const placeOf = ({ jobId, estimateId, issueId }: SampleIssue) =>
   `${walk.address}/jobs/${jobId}/estimates/${estimateId}/issue/${issueId}`;
 
-async function emailOf({ jobId }: SampleIssue): Promise<string> {
-  const { clientId } = await walk.api.app.jobs.job(walk.api.ours.id, jobId);
-  return (await walk.api.app.jobs.client(walk.api.ours.id, clientId)).email;
-}
-
 /** Sends the open issue to its client; answers where the link of the letter leads. */
 async function sendFrom(page: Page, email: string): Promise<string> {
   await page.getByRole('button', { name: 'Send it to the client' }).click();
@@ -46,7 +41,7 @@ const sumOf = (page: Page) => page.locator('.bar .sum').innerText();
 
 it('is sent, asked about and answered, chosen of, and accepted once', async () => {
   const sample = await sampleChoices(walk.api.ours, walk.api);
-  const email = await emailOf(sample);
+  const email = await emailOf(walk, sample);
   const office = await walk.as('office');
   await office.page.goto(placeOf(sample));
   const link = await sendFrom(office.page, email);
@@ -131,10 +126,10 @@ it('says so where the link was taken back, to whoever reads by it and to whoever
   expect(await violations(page)).toEqual([]);
   await see('journey client link taken back');
   await page.getByRole('link', { name: 'Send me a new link' }).tap();
-  await page.getByLabel('E-mail address').fill(await emailOf(sample));
+  await page.getByLabel('E-mail address').fill(await emailOf(walk, sample));
   await page.getByRole('button', { name: 'Send the link' }).tap();
   await page.getByText(/a letter with a link is on its way there/).waitFor();
-  await page.goto(linkOf(walk, await mailTo(walk, await emailOf(sample))));
+  await page.goto(linkOf(walk, await mailTo(walk, await emailOf(walk, sample))));
   await page.waitForURL(/\/client\/(issues|papers)/);
 }, 120_000);
 
@@ -172,7 +167,7 @@ it('is varied: a small estimate of its own, accepted the same way, and the contr
   await owner.page.getByText('Issue A is made, with its papers.').waitFor();
   const [issue] = await walk.api.app.estimates.issues.ofEstimate(walk.api.ours.id, estimateId);
   await owner.page.goto(placeOf({ ...sample, estimateId, issueId: issue?.id ?? '' }));
-  const client = await clientAt(walk, await sendFrom(owner.page, await emailOf(sample)));
+  const client = await clientAt(walk, await sendFrom(owner.page, await emailOf(walk, sample)));
   await client.see('journey client variation');
   await reviewAs(client.page, 'Helena Marsh');
   await client.page.getByRole('button', { name: 'Accept', exact: true }).tap();
