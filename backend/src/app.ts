@@ -56,6 +56,7 @@ function openFeatures(platform: Platform) {
     ...{ accounts, audit, rateCards, jobs },
     papers: new PaperMaking(),
     programme: (workshopId, estimateId) => programme.programmes.frozen(workshopId, estimateId),
+    agreed: (workshopId, issueIds) => towardsClients.agreements.decisions.accepted(workshopId, issueIds),
   });
   const programme: ProgrammeFeature = openProgramme(platform, { accounts, audit, rateCards, jobs, estimates });
   const towardsClients = openTowardsClients(platform, { accounts, audit, jobs, estimates });

@@ -9,6 +9,8 @@ export const decisionSchema = z.strictObject({
   at: z.string(),
   address: z.string(),
   choice: z.array(z.uuid()),
+  /** What was chosen, by name. */
+  alternatives: z.array(z.string()),
   reason: z.string(),
   net_minor: z.int(),
   tax_minor: z.int(),

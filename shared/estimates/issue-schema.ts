@@ -38,6 +38,15 @@ export const pricedIssueSummarySchema = issueSummarySchema.extend({
   net_minor: z.int(),
   tax_minor: z.int(),
   gross_minor: z.int(),
+  /** What was agreed where its client accepted it on their page: the alternatives by their names, and what it comes to with them. */
+  agreed: z
+    .strictObject({
+      alternatives: z.array(z.string()),
+      net_minor: z.int(),
+      tax_minor: z.int(),
+      gross_minor: z.int(),
+    })
+    .optional(),
 });
 export type IssueSummary = z.infer<typeof issueSummarySchema>;
 export type PricedIssueSummary = z.infer<typeof pricedIssueSummarySchema>;

@@ -82,7 +82,8 @@ export const markIssue = endpoint({
 
 export const readPaper = endpoint({
   name: 'readPaper',
-  summary: 'A paper of an issue, byte for byte as it was made when it was issued',
+  summary:
+    'A paper of an issue, byte for byte as it was made when it was issued; the leaf order of one whose client took alternatives is made for these',
   method: 'get',
   path: '/api/issues/:issueId/papers/:paper',
   callers: ['owner', 'estimator', 'office'],
@@ -93,7 +94,8 @@ export const readPaper = endpoint({
 
 export const readBenchSheet = endpoint({
   name: 'readBenchSheet',
-  summary: 'What the bench needs to know of one piece, as it stands now, without any price',
+  summary:
+    'What the bench needs to know of one piece, without any price: as it was agreed, or as it stands now where nothing is',
   method: 'get',
   path: '/api/estimates/:estimateId/pieces/:pieceId/bench-sheet.pdf',
   callers: ['owner', 'estimator', 'office', 'bench'],

@@ -8,6 +8,8 @@ export interface Deciding {
   readonly issue: IssueOfEstimate;
   readonly all: readonly IssueOfEstimate[];
   readonly today: string;
+  /** How the workshop writes its days. */
+  readonly locale: string;
 }
 
 /** Whether an issue may still be declined: neither replaced nor decided. */
@@ -21,10 +23,10 @@ export function mayBeDeclined({ issue: { row }, today }: Deciding): void {
 /** Whether an issue may still be accepted: besides, on a day it holds, and no other issue of its estimate accepted before. */
 export function mayBeAccepted(deciding: Deciding): void {
   mayBeDeclined(deciding);
-  const { issue, all, today } = deciding;
+  const { issue, all, today, locale } = deciding;
   const others = all.filter(({ estimate, row }) => estimate.id === issue.estimate.id && row.id !== issue.row.id);
   if (others.some(({ row }) => row.state === 'accepted')) throw new Rejection('conflict', 'decision-another-accepted');
   if (issueStanding(issue.row, today) !== 'past-validity') return;
-  const day = formatDay(issue.row.validUntil, 'en-GB');
+  const day = formatDay(issue.row.validUntil, locale);
   throw new Rejection('conflict', 'decision-past-validity', { values: { day } });
 }

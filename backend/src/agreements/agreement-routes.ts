@@ -11,17 +11,19 @@ import { presentDecision } from './decision-presenter';
 import { presentQuestion } from './question-presenter';
 import type { ContractService } from './contract-service';
 import type { QuestionService } from './question-service';
+import type { NamedDecisions } from './named-decisions';
 import type { VariationService } from './variation-service';
 
 interface Services {
   readonly access: AccessService;
   readonly questions: QuestionService;
   readonly contracts: ContractService;
+  readonly named: NamedDecisions;
   readonly papers: AcceptedPaperService;
   readonly variations: VariationService;
 }
 
-export const agreementRoutes = ({ access, questions, contracts, papers, variations }: Services): Route[] => [
+export const agreementRoutes = ({ access, questions, contracts, named, papers, variations }: Services): Route[] => [
   mount(giveAccess, async ({ actor, params, body }) => {
     const given = await access.give(actor, params.issueId, body);
     return { access: presentAccess(given.access), link: given.link };
@@ -39,9 +41,12 @@ export const agreementRoutes = ({ access, questions, contracts, papers, variatio
     presentQuestion(await questions.answer(actor, params.jobId, body)),
   ),
   mount(readAgreement, async ({ actor, params }) => {
-    const decisions = await contracts.decisions(actor.workshopId, params.jobId);
+    const decisions = await named.of(await contracts.decisions(actor.workshopId, params.jobId));
     const contract = await contracts.contract(actor.workshopId, params.jobId);
-    return { contract: contract ? presentContract(contract) : null, decisions: decisions.map(presentDecision) };
+    return {
+      contract: contract ? presentContract(contract) : null,
+      decisions: decisions.map(({ row, names }) => presentDecision(row, names)),
+    };
   }),
   mount(readAcceptedPaper, ({ actor, params }) => papers.read(actor.workshopId, params.decisionId)),
   mount(beginVariation, async ({ actor, params, body }) =>

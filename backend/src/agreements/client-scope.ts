@@ -2,10 +2,12 @@ import type { ClientActor } from '#shared/actor/client-actor';
 import { Rejection } from '#shared/problems/rejection';
 import type { FrozenIssue, FrozenIssueService, IssueOfEstimate } from '../estimates';
 import type { Jobs, NamedJobRow } from '../jobs';
+import type { ClientAccessRepository } from './client-access-repository';
 
 interface Parts {
   readonly jobs: Pick<Jobs, 'job' | 'service'>;
   readonly frozen: FrozenIssueService;
+  readonly accesses: ClientAccessRepository;
 }
 
 /** An issue a client may read, with the job it belongs to. */
@@ -36,6 +38,14 @@ export class ClientScope {
   /** All issues of a job, the newest first. */
   allOf(workshopId: string, jobId: string): Promise<IssueOfEstimate[]> {
     return this.parts.frozen.ofJob(workshopId, jobId);
+  }
+
+  /** Those a client is shown: sent or decided, or there when somebody gave them a link. */
+  async shownOf(workshopId: string, jobId: string): Promise<IssueOfEstimate[]> {
+    const issues = await this.allOf(workshopId, jobId);
+    const accesses = await this.parts.accesses.ofJob(workshopId, jobId);
+    const given = accesses.filter(({ purpose }) => purpose === 'link').map(({ createdAt }) => createdAt.getTime());
+    return issues.filter(({ row }) => row.markedOn !== null || given.some((at) => at >= row.issuedAt.getTime()));
   }
 
   async issue(client: ClientActor, issueId: string): Promise<ClientIssueRows> {

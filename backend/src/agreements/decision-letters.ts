@@ -1,3 +1,4 @@
+import { chosenNames } from '#shared/estimates/chosen-names';
 import type { LetterValues } from '#shared/agreements/filled-letter';
 import type { ClientActor } from '#shared/actor/client-actor';
 import type { Jobs } from '../jobs';
@@ -32,7 +33,7 @@ export class DecisionLetters {
       kind: 'accepted',
       values: (figures) => ({
         ...{ ...this.named(issue), client: client.name, signed: row.typedName },
-        total: total(figures),
+        ...{ total: total(figures), chosen: this.chosen(issue, row) },
       }),
       enclosures,
       ...(email === '' ? {} : { replyTo: email }),
@@ -45,6 +46,11 @@ export class DecisionLetters {
       values: () => ({ ...this.named(issue), client: name, text: row.reason }),
       ...(email === '' ? {} : { replyTo: email }),
     });
+  }
+
+  private chosen({ snapshot }: ClientIssueRows, { choice }: DecisionRow): string {
+    const names = chosenNames(snapshot.draft.settings.alternatives, choice);
+    return names.length > 0 ? words('notice-chosen', { names: names.join(', ') }) : words('notice-chosen-base');
   }
 
   private named({ job, estimate, row }: ClientIssueRows): LetterValues & { job: string; number: string } {

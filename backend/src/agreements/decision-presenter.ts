@@ -1,7 +1,7 @@
 import type { Decision } from '#shared/agreements/decision-schema';
 import type { DecisionRow } from './decision-model';
 
-export const presentDecision = (row: DecisionRow): Decision => ({
+export const presentDecision = (row: DecisionRow, alternatives: readonly string[]): Decision => ({
   id: row.id,
   issueId: row.issueId,
   kind: row.kind,
@@ -9,6 +9,7 @@ export const presentDecision = (row: DecisionRow): Decision => ({
   at: row.at.toISOString(),
   address: row.address,
   choice: [...row.choice],
+  alternatives: [...alternatives],
   reason: row.reason,
   net_minor: row.netMinor,
   tax_minor: row.taxMinor,

@@ -1,3 +1,4 @@
+import { Op } from 'sequelize';
 import type { Database } from '../platform/database/database';
 import { WorkshopRows } from '../platform/database/workshop-rows';
 import { decisionTable, type DecisionRow } from './decision-model';
@@ -21,6 +22,10 @@ export class DecisionRepository {
   async onIssue(workshopId: string, issueId: string): Promise<DecisionRow | undefined> {
     const [row] = await this.rows.list(workshopId, { where: { issueId }, limit: 1 });
     return row;
+  }
+
+  accepted(workshopId: string, issueIds: readonly string[]): Promise<DecisionRow[]> {
+    return this.rows.list(workshopId, { where: { kind: 'accepted', issueId: { [Op.in]: [...issueIds] } } });
   }
 
   add(workshopId: string, decision: Omit<DecisionRow, 'workshopId'>): Promise<DecisionRow> {

@@ -55,7 +55,7 @@ export class DecisionService {
       taxes: taxes.map((of) => ({ tax: of.tax, net_minor: of.net_minor, tax_minor: of.tax_minor })),
       ...{ netMinor: net_minor, taxMinor: tax_minor, grossMinor: gross_minor, pdfSha256: sha256, fileId: file.id },
     });
-    await this.mark(client, deciding, { state: 'accepted', note: wish.typedName });
+    await this.mark(client, deciding, { state: 'accepted', note: wish.typedName, choice: row.choice });
     await this.parts.letters.accepted(client, issue, row);
     return row;
   }
@@ -79,6 +79,12 @@ export class DecisionService {
     return this.parts.decisions.onIssue(workshopId, issueId);
   }
 
+  /** What was accepted of these issues, by their ids. */
+  async accepted(workshopId: string, issueIds: readonly string[]): Promise<ReadonlyMap<string, DecisionRow>> {
+    const rows = await this.parts.decisions.accepted(workshopId, issueIds);
+    return new Map(rows.map((row) => [row.issueId, row]));
+  }
+
   /** Today where the workshop is. */
   async today(workshopId: string): Promise<string> {
     const { timeZone } = await this.parts.workshops.get(workshopId);
@@ -88,7 +94,8 @@ export class DecisionService {
   private async deciding(issue: ClientIssueRows): Promise<Deciding> {
     const { workshopId } = issue.row;
     const all = await this.parts.scope.allOf(workshopId, issue.job.id);
-    return { issue, all, today: await this.today(workshopId) };
+    const { locale } = await this.parts.workshops.get(workshopId);
+    return { issue, all, today: await this.today(workshopId), locale };
   }
 
   private start(client: ClientActor, { row, job }: ClientIssueRows, address: string): Start {
@@ -100,7 +107,7 @@ export class DecisionService {
   private async mark(
     { workshopId, name }: ClientActor,
     { issue, today }: Deciding,
-    mark: { state: 'accepted' | 'declined'; note: string },
+    mark: { state: 'accepted' | 'declined'; note: string; choice?: Choice },
   ): Promise<void> {
     await this.parts.estimates.issues.mark({ workshopId, accountId: null, name }, issue.row.id, {
       ...mark,

@@ -19,6 +19,7 @@ import { letterRoutes } from './letter-routes';
 import { LetterService } from './letter-service';
 import { LetterTemplateRepository } from './letter-template-repository';
 import { LetterTemplateService } from './letter-template-service';
+import { NamedDecisions } from './named-decisions';
 import { QuestionRepository } from './question-repository';
 import { QuestionService } from './question-service';
 import { SignInService } from './sign-in-service';
@@ -75,12 +76,16 @@ function openLetters({ database, mailbox }: Platform, { accounts, audit }: Agree
   return { templates, letters: new LetterService({ templates, accounts, mailbox }) };
 }
 
-function openDecisions(platform: Platform, needs: AgreementsNeeds, letters: LetterService) {
+function openDecisions(
+  platform: Platform,
+  needs: AgreementsNeeds,
+  { letters, accesses }: { letters: LetterService; accesses: ClientAccessRepository },
+) {
   const { estimates, jobs, accounts } = needs;
   const decisions = new DecisionRepository(platform.database);
   const { frozen } = estimates;
   const base = { ...platform, estimates, jobs, frozen, decisions, workshops: accounts.workshops };
-  const scope = new ClientScope(base);
+  const scope = new ClientScope({ ...base, accesses });
   const choices = new ChoiceService(frozen);
   const contracts = new ContractService(base);
   const told = new DecisionLetters({ ...base, letters, origin: ownOrigin(platform.config) });
@@ -98,8 +103,8 @@ function openDecisions(platform: Platform, needs: AgreementsNeeds, letters: Lett
 export function openAgreements(platform: Platform, needs: AgreementsNeeds): Agreements {
   const { accounts, audit, jobs, estimates } = needs;
   const { templates, letters } = openLetters(platform, needs);
-  const decided = openDecisions(platform, needs, letters);
   const accesses = new ClientAccessRepository(platform.database);
+  const decided = openDecisions(platform, needs, { letters, accesses });
   const told = { ...platform, jobs, letters, audit: audit.service, origin: ownOrigin(platform.config) };
   const access = new AccessService({ ...told, accesses, estimates, workshops: accounts.workshops });
   const questions = new QuestionService({
@@ -113,6 +118,9 @@ export function openAgreements(platform: Platform, needs: AgreementsNeeds): Agre
     ...{ access, questions, letters, templates },
     visits: new VisitService({ ...told, accesses }),
     signIns: new SignInService({ ...told, accesses, access, accounts }),
-    routes: [...agreementRoutes({ ...decided, access, questions }), ...letterRoutes(letters, templates)],
+    routes: [
+      ...agreementRoutes({ ...decided, access, questions, named: new NamedDecisions(estimates.frozen) }),
+      ...letterRoutes(letters, templates),
+    ],
   };
 }

@@ -23,10 +23,12 @@ export interface ClientIssueFacts {
 
 type Summary = z.infer<typeof clientIssueSummarySchema>;
 
+/** An issue in a list; one that was accepted with what was agreed. */
 export function presentClientSummary(
   { row, estimate, title }: IssueOfEstimate,
-  at: { today: string; timeZone: string },
+  at: { today: string; timeZone: string; decision: DecisionRow | undefined },
 ): Summary {
+  const { decision } = at;
   return {
     id: row.id,
     kind: estimate.kind,
@@ -36,7 +38,7 @@ export function presentClientSummary(
     state: issueStanding(row, at.today),
     issuedOn: dayOfInstant(row.issuedAt.getTime(), at.timeZone),
     validUntil: row.validUntil,
-    gross_minor: row.grossMinor,
+    gross_minor: decision?.kind === 'accepted' ? decision.grossMinor : row.grossMinor,
     currency: estimate.currency,
   };
 }
@@ -55,7 +57,7 @@ export const presentClientDecision = (row: DecisionRow): NonNullable<ClientIssue
 export function presentClientIssue(facts: ClientIssueFacts): ClientIssue {
   const { workshop, issue, frozen, mayChoose, all, decision, questions, today } = facts;
   const { job, row, snapshot } = issue;
-  const summary = presentClientSummary(issue, { today, timeZone: workshop.timeZone });
+  const summary = presentClientSummary(issue, { today, timeZone: workshop.timeZone, decision });
   const ofEstimate = all.filter(({ estimate }) => estimate.id === issue.estimate.id);
   return {
     letterhead: presentClientLetterhead(workshop, snapshot.workshop.currency),

@@ -55,7 +55,7 @@ export class ClientPageService {
     return presentClientIssue({
       issue,
       workshop: await this.parts.accounts.workshops.get(workshopId),
-      all: await scope.allOf(workshopId, issue.job.id),
+      all: await scope.shownOf(workshopId, issue.job.id),
       decision: await decisions.onIssue(workshopId, issueId),
       questions: await questions.ofJob(workshopId, issue.job.id),
       frozen: await this.frozen.of(issue),
@@ -80,8 +80,11 @@ export class ClientPageService {
   }
 
   private async jobOf(client: ClientActor, job: NamedJobRow, at: { today: string; timeZone: string }) {
-    const issues = await this.parts.agreements.scope.allOf(client.workshopId, job.id);
-    const shown = issues.map((issue) => presentClientSummary(issue, at));
+    const { scope, decisions } = this.parts.agreements;
+    const issues = await scope.shownOf(client.workshopId, job.id);
+    const ids = issues.map(({ row }) => row.id);
+    const accepted = await decisions.accepted(client.workshopId, ids);
+    const shown = issues.map((issue) => presentClientSummary(issue, { ...at, decision: accepted.get(issue.row.id) }));
     return { id: job.id, number: jobNumber(job), title: job.title, issues: shown };
   }
 }

@@ -9,7 +9,7 @@ import type { EstimateRepository } from './estimate-repository';
 import { thawedSnapshot } from './frozen-snapshot';
 import type { IssueRow } from './issue-model';
 import type { IssueRepository } from './issue-repository';
-import type { PaperMaker } from './paper-maker';
+import type { PaperFile, PaperMaker } from './paper-maker';
 import type { RiskDrawing } from './risk-drawing';
 
 interface Parts {
@@ -69,6 +69,12 @@ export class FrozenIssueService {
   async chosen({ snapshot }: Pick<FrozenIssue, 'snapshot'>, choice: Choice): Promise<Snapshot> {
     if (choice.length === 0) return snapshot;
     if (snapshot.calculatorVersion !== calculatorVersion) throw new Rejection('conflict', 'choice-fixed');
+    return this.worked(snapshot, choice);
+  }
+
+  /** The same for work that is agreed on already: a later reckoning of it serves the bench as well. */
+  async worked(snapshot: Snapshot, choice: Choice): Promise<Snapshot> {
+    if (choice.length === 0) return snapshot;
     const { draft, card, workshop } = snapshot;
     const figures = await this.parts.risks.priced({ draft, card, choice, currency: workshop.currency });
     const all = [...figures.findings, ...figures.cost.findings];
@@ -83,6 +89,11 @@ export class FrozenIssueService {
     const fileId = await this.parts.issues.paperFile(workshopId, id, 'estimate.pdf');
     if (!fileId) throw new Rejection('not-found', 'problem-not-found');
     return this.parts.files.read(workshopId, fileId);
+  }
+
+  /** All papers, set from an issue as chosen. */
+  async papers({ workshopId }: IssueRow, chosen: Snapshot): Promise<readonly PaperFile[]> {
+    return this.parts.papers.issuePapers(chosen, await this.logo(workshopId));
   }
 
   private async logo(workshopId: string): Promise<Buffer | null> {

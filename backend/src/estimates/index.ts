@@ -6,6 +6,8 @@ import type { Jobs } from '../jobs';
 import type { Route } from '../platform/http/mount';
 import type { Platform } from '../platform/platform';
 import type { CardEffects, RateCards } from '../rate-cards';
+import { AgreedChoices } from './agreed-choices';
+import type { AgreedIssues } from './agreed-issue';
 import { cardEffects } from './card-effects';
 import { ChangeService } from './change-service';
 import { memberRepository, pieceRepository } from './content-repository';
@@ -18,6 +20,7 @@ import type { PaperMaker } from './paper-maker';
 import { IssueRepository } from './issue-repository';
 import { issueRoutes } from './issue-routes';
 import { type FrozenProgramme, IssueService } from './issue-service';
+import { PaperService } from './paper-service';
 import { PresenceRepository } from './presence-repository';
 import { PresenceService } from './presence-service';
 import { ReadingRepository } from './reading-repository';
@@ -25,6 +28,7 @@ import { ReadingService } from './reading-service';
 import { RiskDrawing } from './risk-drawing';
 
 export type { BenchSheetRequest, PaperFile, PaperMaker } from './paper-maker';
+export type { AgreedIssue } from './agreed-issue';
 export type { EstimateService } from './estimate-service';
 export type { FrozenIssue, FrozenIssueService, IssuedPaper, IssueOfEstimate } from './frozen-issue-service';
 export { presentSummary } from './estimate-presenter';
@@ -35,6 +39,8 @@ export interface Estimates {
   readonly issues: IssueService;
   /** Issues as they were frozen, for whoever reads or accepts them. */
   readonly frozen: FrozenIssueService;
+  /** What was agreed on issues: the base, or the alternatives their clients took. */
+  readonly choices: AgreedChoices;
   /** What another rate card does to every open estimate. */
   readonly cardEffects: CardEffects;
   /** Any estimate up to its price, drawn for risk only where the price waits for it. */
@@ -42,7 +48,7 @@ export interface Estimates {
   readonly routes: readonly Route[];
 }
 
-/** What stands before estimates in the list of features, and what those that stand after supply: the maker of papers, the programme. */
+/** What stands before estimates in the list of features, and what those that stand after supply: the maker of papers, the programme, what was agreed. */
 export interface EstimatesNeeds {
   readonly accounts: Accounts;
   readonly audit: Audit;
@@ -50,6 +56,7 @@ export interface EstimatesNeeds {
   readonly jobs: Jobs;
   readonly papers: PaperMaker;
   readonly programme: FrozenProgramme;
+  readonly agreed: AgreedIssues;
 }
 
 /** Estimates: drafts and their issues. */
@@ -70,10 +77,13 @@ export function openEstimates({ database, clock, files }: Platform, needs: Estim
   const drafts = new EstimateService({ ...parts, presences, readings, changes: new ChangeService(parts) });
   const kept = { ...parts, drafts, issues: new IssueRepository(database), files, papers: needs.papers };
   needs.accounts.workshops.followCurrency(currencyChange(kept));
-  const issues = new IssueService({ ...kept, programme: needs.programme });
+  const choices = new AgreedChoices({ ...kept, agreed: needs.agreed });
+  const frozen = new FrozenIssueService(kept);
+  const issues = new IssueService({ ...kept, choices, programme: needs.programme });
+  const papers = new PaperService({ ...kept, choices, frozen });
   const presence = new PresenceService({ ...parts, presences });
   const effects = cardEffects({ drafts, jobs: needs.jobs, cards: needs.rateCards.service, risks: parts.risks });
-  const routes = [...estimateRoutes(drafts, presence), ...issueRoutes(issues)];
+  const routes = [...estimateRoutes(drafts, presence), ...issueRoutes({ issues, papers, choices })];
   const priced = (input: EstimateInput) => parts.risks.priced(input);
-  return { drafts, issues, frozen: new FrozenIssueService(kept), cardEffects: effects, priced, routes };
+  return { drafts, issues, frozen, choices, cardEffects: effects, priced, routes };
 }

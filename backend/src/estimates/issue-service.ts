@@ -3,8 +3,9 @@ import type { Actor } from '#shared/actor/actor';
 import { audienceOf } from '#shared/actor/role';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import type { CostedEstimate, PricedEstimate } from '#shared/estimates/estimate-schema';
+import { chosenNames } from '#shared/estimates/chosen-names';
+import type { Choice } from '#shared/estimates/draft';
 import { issueLetter } from '#shared/estimates/issue-letter';
-import type { Paper } from '#shared/estimates/issue-schema';
 import { lineDifferences, type LineDifference, type NamedLines } from '#shared/estimates/line-differences';
 import type { Snapshot, SnapshotProgramme } from '#shared/estimates/snapshot';
 import { Rejection } from '#shared/problems/rejection';
@@ -12,16 +13,16 @@ import type { Doer } from '../audit';
 import { jobNumber, type NamedJobRow } from '../jobs';
 import type { FileStore } from '../platform/files/file-store';
 import { dayOfInstant } from '#shared/calendar/day-of-instant';
-import { FileAnswer } from '../platform/http/answer';
+import type { AgreedChoices } from './agreed-choices';
 import type { EstimateParts, EstimateService } from './estimate-service';
 import { presentEstimate } from './estimate-presenter';
 import { frozenSnapshot, thawedSnapshot, wholeOfSnapshot } from './frozen-snapshot';
 import type { IssueRow } from './issue-model';
 import type { PaperMaker } from './paper-maker';
 import { mayBeIssued, mayBeMarked } from './issue-policy';
-import { presentFrozenDates, presentIssue } from './issue-presenter';
+import { presentFrozenDates } from './issue-presenter';
 import type { IssueRepository } from './issue-repository';
-import { snapshotOf, snapshotWorkshop } from './snapshot-of';
+import { snapshotOf } from './snapshot-of';
 import type { WholeEstimate } from './whole-estimate';
 
 /** The programme of an estimate as an issue freezes it; a later feature supplies it. Null where no plan holds. */
@@ -36,6 +37,7 @@ export interface IssueParts extends Pick<
   readonly files: FileStore;
   readonly papers: PaperMaker;
   readonly programme: FrozenProgramme;
+  readonly choices: AgreedChoices;
 }
 
 export interface IssueRequest {
@@ -49,11 +51,27 @@ const namedLines = ({ draft, figures }: Pick<Snapshot, 'draft' | 'figures'>): Na
   memberNames: Object.fromEntries(draft.members.map((member) => [member.id, member.name])),
 });
 
+/** Where an issue stands from a day on; what was chosen where its client accepted it on the page. */
+export interface IssueMarking {
+  readonly state: 'sent' | 'accepted' | 'declined';
+  readonly day: string;
+  readonly note: string;
+  readonly choice?: Choice;
+}
+
 const auditCodes = {
   sent: 'history-issue-sent',
   accepted: 'history-issue-accepted',
   declined: 'history-issue-declined',
 } as const;
+
+/** A marking as the history tells it, with the alternatives by their names. */
+function markingDeed(issue: IssueRow, number: string, { state, choice = [] }: IssueMarking) {
+  const values = { letter: issue.letter, number };
+  if (choice.length === 0) return { code: auditCodes[state], values };
+  const names = chosenNames(thawedSnapshot(issue).draft.settings.alternatives, choice);
+  return { code: 'history-issue-accepted-with', values: { ...values, chosen: names.join(', ') } } as const;
+}
 
 /** Issues: freezing an estimate with its papers, reading them back, and marking where they stand with the client. */
 export class IssueService {
@@ -93,11 +111,7 @@ export class IssueService {
   }
 
   /** Marks an issue sent, accepted or declined; the job's state follows, but for a variation, which leaves it where it is. */
-  async mark(
-    by: Doer,
-    id: string,
-    mark: { state: 'sent' | 'accepted' | 'declined'; day: string; note: string },
-  ): Promise<IssueRow> {
+  async mark(by: Doer, id: string, mark: IssueMarking): Promise<IssueRow> {
     const { workshopId } = by;
     const issue = await this.parts.issues.lock(workshopId, id);
     const { timeZone } = await this.parts.workshops.get(workshopId);
@@ -111,13 +125,8 @@ export class IssueService {
     });
     const estimate = await this.parts.estimates.get(workshopId, issue.estimateId);
     if (estimate.kind === 'estimate') await this.parts.jobs.markState(by, estimate.jobId, mark.state);
-    const values = { letter: issue.letter, number: estimate.number };
-    await this.parts.audit.record(by, {
-      subject: { kind: 'issue', id },
-      jobId: estimate.jobId,
-      code: auditCodes[mark.state],
-      values,
-    });
+    const deed = markingDeed(issue, estimate.number, mark);
+    await this.parts.audit.record(by, { subject: { kind: 'issue', id }, jobId: estimate.jobId, ...deed });
     return row;
   }
 
@@ -128,9 +137,10 @@ export class IssueService {
     const { jobId, kind, rateCardId } = estimate;
     const snapshot = thawedSnapshot(row);
     const before = await this.parts.issues.newest(workshopId, row.estimateId, row.sequence);
+    const [summary] = await this.parts.choices.shown(workshopId, [row]);
     const whole = wholeOfSnapshot(snapshot, { ...row, jobId, kind, rateCardId });
     return {
-      summary: presentIssue(row),
+      summary,
       differences: before ? lineDifferences(namedLines(thawedSnapshot(before)), namedLines(snapshot)) : [],
       alternatives: [...snapshot.alternatives],
       dates: presentFrozenDates(snapshot),
@@ -150,31 +160,6 @@ export class IssueService {
     const memberNames = Object.fromEntries(whole.members.map(({ id, content }) => [id, content.name]));
     const after = { lines: figures.price.lines, memberNames };
     return { letter: newest.letter, lines: lineDifferences(namedLines(thawedSnapshot(newest)), after) };
-  }
-
-  /** A paper as it was kept; the workbook holds rates and margin, so it is for those who see cost. */
-  async paper(actor: Actor, issueId: string, paper: Paper): Promise<FileAnswer> {
-    const { workshopId } = actor;
-    if (paper === 'estimate.xlsx' && audienceOf(actor.roles) !== 'cost')
-      throw new Rejection('not-allowed', 'problem-not-allowed');
-    await this.parts.issues.get(workshopId, issueId);
-    const fileId = await this.parts.issues.paperFile(workshopId, issueId, paper);
-    if (!fileId) throw new Rejection('not-found', 'problem-not-found');
-    const { bytes, name, media } = await this.parts.files.read(workshopId, fileId);
-    return new FileAnswer(bytes, { name, media });
-  }
-
-  async benchSheet(workshopId: string, estimateId: string, pieceId: string): Promise<FileAnswer> {
-    const whole = await this.parts.drafts.whole(workshopId, estimateId);
-    const piece = whole.pieces.find((one) => one.id === pieceId);
-    if (!piece) throw new Rejection('not-found', 'problem-not-found');
-    const figures = await this.parts.drafts.figures(whole);
-    const job = await this.job(workshopId, whole.estimate.jobId);
-    const workshop = snapshotWorkshop(await this.parts.workshops.get(workshopId));
-    const made = { madeAt: this.parts.clock.now().toISOString(), madeOn: await this.parts.cards.today(workshopId) };
-    const draft = this.parts.drafts.draft(whole);
-    const bytes = await this.parts.papers.benchSheet({ workshop, job, pieceId, draft, figures, ...made });
-    return new FileAnswer(bytes, { name: `${job.number} ${piece.content.name}.pdf`, media: 'application/pdf' });
   }
 
   /** Of one estimate one issue is agreed on: what changes afterwards is a variation. */

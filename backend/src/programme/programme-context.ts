@@ -100,7 +100,7 @@ export class ProgrammeContexts {
     const { timeZone } = await workshops.get(workshopId);
     const today = await this.today(workshopId);
     const known = (await marks.ofProgramme(workshopId, estimateId)).map(presentMark);
-    const inputs = asked ?? row?.inputs ?? startInputs(today);
+    const inputs = asked ?? (await this.agreed(whole, row?.inputs ?? startInputs(today)));
     const frame = programmeFrame(firstDayOf(inputs, known, { known: row?.firstDay ?? today, timeZone }), timeZone);
     return {
       ...{ workshopId, whole, row, inputs, marks: known, frame, today },
@@ -109,6 +109,12 @@ export class ProgrammeContexts {
       shop: await shops.shop(workshopId),
       promised: await promises.around({ workshopId, id: estimateId }, today, frame),
     };
+  }
+
+  /** What an accepted issue was accepted with is what is planned, whatever was planned before. */
+  private async agreed({ estimate }: WholeEstimate, inputs: ProgrammeInputs): Promise<ProgrammeInputs> {
+    const accepted = await this.parts.estimates.choices.ofEstimate(estimate.workshopId, estimate.id);
+    return accepted ? { ...inputs, choice: accepted.choice } : inputs;
   }
 }
 

@@ -69,7 +69,9 @@ export const agreements = {
     '{client} writes about {number}, {job}:\n\n{text}\n\nAnswer in the job itself, so that it stands in the thread:\n\n{link}\n',
   'notice-accepted-subject': '{client} has accepted {number}',
   'notice-accepted-text':
-    '{client} has accepted {number} for {job}, {total} with tax, signed as {signed}. The accepted paper is attached.\n\n{link}\n',
+    '{client} has accepted {number} for {job}, {total} with tax, signed as {signed}. {chosen}\n\nThe accepted paper is attached.\n\n{link}\n',
+  'notice-chosen': 'Alternatives chosen: {names}.',
+  'notice-chosen-base': 'It is accepted as offered, without alternatives.',
   'notice-declined-subject': '{client} has declined {number}',
   'notice-declined-text': '{client} has declined {number} for {job}.\n\n{text}\n\n{link}\n',
   'example-client': 'Helena Marsh',

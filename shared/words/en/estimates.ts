@@ -21,6 +21,8 @@ export const estimates = {
   'paid-quantity-differs': 'The quantity is not what its measures come to.',
   'alternative-empty':
     'The alternative “{name}” has nothing in it and leaves nothing out. It stays off the papers until it says what is done otherwise.',
+  'alternatives-overlap':
+    'The alternatives “{first}” and “{second}” may be chosen together, and both take the place of “{part}”. Put them in one group, so that the client takes one or the other.',
   'card-start-prices':
     'The rate card still has the {of, select, hours {rates of hours} other {prices of leaf}} every workshop starts from, which were meant in {start}, and here they are taken as {currency}. Enter your own and put the card in force.',
   'currency-issued':
@@ -39,5 +41,6 @@ export const estimates = {
   'history-issued': 'Issue {letter} of estimate {number} was made',
   'history-issue-sent': 'Issue {letter} of estimate {number} was sent',
   'history-issue-accepted': 'Issue {letter} of estimate {number} was accepted',
+  'history-issue-accepted-with': 'Issue {letter} of estimate {number} was accepted with {chosen}',
   'history-issue-declined': 'Issue {letter} of estimate {number} was declined',
 } as const;

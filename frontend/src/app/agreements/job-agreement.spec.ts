@@ -10,7 +10,7 @@ const job = { id: id(10), changedAt: '2026-03-02T10:00:00.000Z' };
 const plan = { deposit_percent: '40', stages_percent: ['60'], retention_percent: '0' };
 const part = (number: string, kind: 'estimate' | 'variation', net_minor: number) => ({
   ...{ issueId: id(20), estimateId: id(21), kind, number, title: `Pier table ${number}`, acceptedOn: '2026-03-02' },
-  ...{ choice: [], taxes: [], net_minor, tax_minor: 0, gross_minor: net_minor, plan, stageNames: ['Delivery'] },
+  ...{ choice: [], taxes: [], exemptions: [], net_minor, tax_minor: 0, gross_minor: net_minor, plan, stageNames: ['Delivery'] },
 });
 const contract = (...parts: ReturnType<typeof part>[]) => ({
   ...{ jobId: job.id, clientId: id(30), currency: 'EUR', parts },
@@ -18,7 +18,7 @@ const contract = (...parts: ReturnType<typeof part>[]) => ({
 });
 const decision = {
   ...{ id: id(40), issueId: id(20), kind: 'accepted', typedName: 'Helena Marsh', at: '2026-03-02T10:30:00.000Z' },
-  ...{ address: '203.0.113.7', choice: [], reason: '', net_minor: 5_000_00, tax_minor: 1_150_00 },
+  ...{ address: '203.0.113.7', choice: [], alternatives: [], reason: '', net_minor: 5_000_00, tax_minor: 1_150_00 },
   ...{ gross_minor: 6_150_00, pdfSha256: 'ab'.repeat(32) },
 };
 const question = {
@@ -59,7 +59,14 @@ describe('JobAgreement', () => {
     const widget = await open({ agreement: { contract: null, decisions: [decision] } });
     for (const text of ['Accepted by Helena Marsh, €6,150.00 with tax', '10:30', '203.0.113.7', 'ab'.repeat(32)])
       expect(widget.text).toContain(text);
+    expect(widget.text).not.toContain('Chosen');
     expect(widget.element.querySelector('a')?.getAttribute('href')).toBe(`/api/decisions/${id(40)}/estimate.pdf`);
+  });
+
+  it('names the alternatives that were chosen', async () => {
+    const chosen = { ...decision, choice: [id(80), id(81)], alternatives: ['Back legs toned, not gilt', 'A crate'] };
+    const widget = await open({ agreement: { contract: null, decisions: [chosen] } });
+    expect(widget.text).toContain('Chosen: Back legs toned, not gilt, A crate');
   });
 
   it('tells why it was declined', async () => {

@@ -47,6 +47,7 @@ export class JobAgreement {
   protected readonly decisions = computed(() =>
     (this.agreement()?.decisions ?? []).map((decision) => ({
       ...decision,
+      chosen: decision.alternatives.join(', '),
       when: $localize`${this.formats.dayOf(decision.at)}:day:, ${this.formats.time(decision.at)}:time:`,
       paper: decision.pdfSha256 ? addressOf(readAcceptedPaper, { params: { decisionId: decision.id } }) : '',
     })),

@@ -60,7 +60,7 @@ export class IssueParts {
       key: issue.id,
       name: $localize`Issue ${issue.letter}:letter:`,
       about: `${issueStateNames[issue.state]}, ${this.dayOf(issue)}`,
-      amount: this.formats.wholeMoney(issue.gross_minor),
+      amount: this.formats.wholeMoney((issue.agreed ?? issue).gross_minor),
       route: this.issueRoute(issue.id),
     };
   }

@@ -88,13 +88,16 @@ export class IssueViewPage {
     return place >= 0 && letter ? $localize`Issue ${letter}:letter:` : '';
   });
   protected readonly net_minor = computed(() => this.issue()?.summary.net_minor ?? 0);
-  protected readonly sums = computed(() => {
-    const { net_minor = 0, gross_minor = 0 } = this.issue()?.summary ?? {};
-    return { net: this.formats.money(net_minor), gross: this.formats.money(gross_minor) };
-  });
+  protected readonly sums = computed(() => this.written(this.issue()?.summary));
+  /** What the client accepted it at. */
+  protected readonly agreedSums = computed(() => this.written(this.issue()?.summary.agreed));
 
   constructor() {
     inject(PlaceExplanation);
+  }
+
+  private written({ net_minor, gross_minor } = { net_minor: 0, gross_minor: 0 }) {
+    return { net: this.formats.money(net_minor), gross: this.formats.money(gross_minor) };
   }
 
   /** What the client was sent has another state now. */

@@ -66,6 +66,9 @@ export class Workspace implements OnInit {
   /** The letter the next issue will bear. */
   protected readonly nextLetter = computed(() => issueLetter(this.store.issues().length + 1));
 
+  /** What is agreed is not worked toward any more. */
+  protected readonly acceptedLetter = computed(() => this.store.accepted()?.letter);
+
   constructor() {
     effect(() => this.title?.name(this.heading() || undefined));
   }
