@@ -20,6 +20,7 @@ const contractPartSchema = z.strictObject({
       tax_minor: minor,
     }),
   ),
+  exemptions: z.array(z.strictObject({ code: z.enum(taxCodes), reason: z.string() })),
   net_minor: minor,
   tax_minor: minor,
   gross_minor: minor,

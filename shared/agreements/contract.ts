@@ -1,7 +1,13 @@
 import type { StagePlan } from '#shared/money/stage-payments';
 import type { MinorUnits } from '#shared/money/decimal';
-import type { TaxedNet } from '#shared/money/tax-by-category';
+import type { TaxCode, TaxedNet } from '#shared/money/tax-by-category';
 import type { Choice } from '#shared/estimates/draft';
+
+/** Why nothing is charged under a category, in the words that were frozen with the issue. */
+export interface TaxExemption {
+  readonly code: TaxCode;
+  readonly reason: string;
+}
 
 /** One accepted issue: of the estimate itself, or of a variation after it. Amounts are whole minor units, taxes as the issue states them. */
 export interface ContractPart {
@@ -15,6 +21,8 @@ export interface ContractPart {
   readonly acceptedOn: string;
   readonly choice: Choice;
   readonly taxes: readonly TaxedNet[];
+  /** One at most for each category among the taxes. */
+  readonly exemptions: readonly TaxExemption[];
   readonly net_minor: MinorUnits;
   readonly tax_minor: MinorUnits;
   readonly gross_minor: MinorUnits;

@@ -2,19 +2,24 @@ import fc from 'fast-check';
 import type { Contract, ContractPart } from '#shared/agreements/contract';
 import {
   claimRounding,
-  claimTotals,
   contractAccount,
   isClaiming,
   partAccount,
   type ClaimingInvoice,
 } from '#shared/invoices/contract-account';
 import { claimedAmounts, type StageClaim } from '#shared/invoices/stage-claim';
+import { stageLines } from '#shared/invoices/stage-lines';
+import { workedInvoice } from '#shared/invoices/worked-invoice';
 import { stagePayments } from '#shared/money/stage-payments';
 import { sumMinor } from '#shared/money/sum-minor';
-import { taxByCategory } from '#shared/money/tax-by-category';
+import { taxByCategory, type TaxRate } from '#shared/money/tax-by-category';
 
+const rateOf = (said: string): TaxRate =>
+  said === 'E' || said === 'AE' ? { code: said, percent: '0' } : { code: 'S', percent: said };
+
+/** A part with so much under each rate, or under the category E or AE. */
 const partOf = (nets: readonly (readonly [string, number])[], plan: ContractPart['plan']): ContractPart => {
-  const taxed = taxByCategory(nets.map(([percent, net_minor]) => ({ tax: { code: 'S', percent }, net_minor })));
+  const taxed = taxByCategory(nets.map(([said, net_minor]) => ({ tax: rateOf(said), net_minor })));
   return {
     ...{ issueId: 'issue', estimateId: 'estimate', kind: 'estimate', number: '2026-001 A', title: 'Pier table' },
     ...{
@@ -23,7 +28,7 @@ const partOf = (nets: readonly (readonly [string, number])[], plan: ContractPart
       plan,
       stageNames: plan.stages_percent.map((_, at) => `Stage ${at + 1}`),
     },
-    ...{ taxes: taxed.categories, net_minor: taxed.net_minor, tax_minor: taxed.tax_minor },
+    ...{ taxes: taxed.categories, exemptions: [], net_minor: taxed.net_minor, tax_minor: taxed.tax_minor },
     gross_minor: taxed.gross_minor,
   };
 };
@@ -32,9 +37,46 @@ const plan = { deposit_percent: 30, stages_percent: [40, 40, 20], retention_perc
 const part = partOf([['20', 1_000_00]], plan);
 const work = (from_percent: string, to_percent: string): StageClaim => ({ of: 'work', from_percent, to_percent });
 
+/** The invoice of a claim as the server works it: its lines, taxed by themselves, and the rounding that is known. */
+const workedFor = (one: ContractPart, claim: StageClaim) => {
+  const names = { work: 'Work', recovered: 'Deposit recovered', retained: 'Held back' };
+  const lines = stageLines(claimedAmounts(one, claim), names, 2);
+  const entered = { pricesHold: 'net', lines, allowancesCharges: [], roundsToCash: false } as const;
+  return workedInvoice(entered, 'EUR', claimRounding(one, claim));
+};
+
 const issuedFor = (one: ContractPart, claim: StageClaim, before: readonly ClaimingInvoice[]): ClaimingInvoice => ({
   ...{ invoiceId: `invoice ${before.length}`, issueId: one.issueId, claim, isIssued: true, credited_minor: 0 },
-  due_minor: claimTotals(one, claim).gross_minor + claimRounding(one, claim, before),
+  due_minor: workedFor(one, claim).totals.due_minor,
+});
+
+/** Every claim the plan of a part foresees, each with the payment that paper and review promise for it. */
+function promisedFor({
+  gross_minor,
+  plan: { stages_percent, ...held },
+}: ContractPart): (readonly [StageClaim, number])[] {
+  const { deposit_minor, stages, releases_minor } = stagePayments(gross_minor, { stages_percent, ...held });
+  const ends = stages_percent.map((_, at) =>
+    String(
+      Math.round(stages_percent.slice(0, at + 1).reduce<number>((sum, share) => sum + Number(share) * 10, 0)) / 10,
+    ),
+  );
+  return [
+    [{ of: 'deposit' }, deposit_minor],
+    ...stages.map(({ paid_minor }, at) => [work(ends[at - 1] ?? '0', ends[at]), paid_minor] as const),
+    [{ of: 'first-release' }, releases_minor[0]],
+    [{ of: 'second-release' }, releases_minor[1]],
+  ];
+}
+
+const anyNets = fc.array(
+  fc.tuple(fc.constantFrom('20', '10', '7.7', 'E', 'AE'), fc.integer({ min: -5_000, max: 9_000_000 })),
+  { minLength: 1, maxLength: 4 },
+);
+const anyPlan = fc.record({
+  deposit_percent: fc.integer({ min: 0, max: 50 }),
+  retention_percent: fc.integer({ min: 0, max: 20 }),
+  stages_percent: fc.constantFrom([100], [40, 40, 20], [33.3, 33.3, 33.4], [1, 99], [20, 20, 20, 20, 20]),
 });
 
 /** Invoices whatever is offered next until nothing is left. */
@@ -105,6 +147,20 @@ describe('where a part stands', () => {
     expect(partAccount(part, [wholly]).left_minor).toBe(part.gross_minor);
   });
 
+  it('is not complete while an invoice is credited in part, and says how much of it is; credited wholly, the stage is offered anew', () => {
+    const invoices = invoicedInTurn(part);
+    const [, stage] = invoices;
+    const credited = (credited_minor: number) =>
+      invoices.map((one) => (one === stage ? { ...one, credited_minor } : one));
+    expect(partAccount(part, invoices)).toMatchObject({ isComplete: true, left_minor: 0, creditedInPart_minor: 0 });
+    expect(partAccount(part, credited(100_00))).toMatchObject({
+      ...{ isComplete: false, left_minor: 100_00, creditedInPart_minor: 100_00, next: [] },
+    });
+    expect(partAccount(part, credited(stage.due_minor))).toMatchObject({
+      ...{ isComplete: false, left_minor: stage.due_minor, creditedInPart_minor: 0, next: [{ claim: stage.claim }] },
+    });
+  });
+
   it('counts a draft as claiming, though nothing is invoiced yet', () => {
     const draft = { ...issuedFor(part, { of: 'deposit' }, []), isIssued: false };
     const account = partAccount(part, [draft]);
@@ -114,7 +170,20 @@ describe('where a part stands', () => {
 });
 
 describe('the contract and its invoices', () => {
-  it('agree to the cent where taxes of single invoices do not: 0.05 at 10 % in tenths', () => {
+  it('are the payments of the paper: 25,014.74 at 20 %, three tenths as deposit, 5 % held back', () => {
+    const walked = partOf([['20', 25_014_74]], plan);
+    expect(walked.gross_minor).toBe(30_017_69);
+    // 30 % of 30,017.69 is 9,005.307; of 40 % and 80 % are paid 65 %: 7,804.60 and .60 by shares, .61 and .59 by whole cents reached.
+    expect(invoicedInTurn(walked).map(({ due_minor }) => due_minor)).toEqual([
+      9_005_31, 7_804_61, 7_804_59, 3_902_30, 750_44, 750_44,
+    ]);
+    const first = workedFor(walked, { of: 'deposit' });
+    // The tax stays what it is on 7,504.42; the cent stands behind it.
+    expect(first.totals).toMatchObject({ net_minor: 7_504_42, tax_minor: 1_500_88, gross_minor: 9_005_30 });
+    expect(first.rounding_minor).toBe(1);
+  });
+
+  it('agree to the cent where taxes of single invoices do not: 0.05 at 10 % in fifths of 0.06', () => {
     const small = partOf([['10', 5]], {
       deposit_percent: 0,
       stages_percent: [20, 20, 20, 20, 20],
@@ -122,21 +191,51 @@ describe('the contract and its invoices', () => {
     });
     const invoices = invoicedInTurn(small);
     expect(small.gross_minor).toBe(6);
-    expect(invoices.map(({ due_minor }) => due_minor)).toEqual([1, 1, 1, 1, 2]);
+    // 1.2, 2.4, 3.6, 4.8 and 6 reached, each in whole cents.
+    expect(invoices.map(({ due_minor }) => due_minor)).toEqual([1, 1, 2, 1, 1]);
   });
 
-  it('agree in whatever plan, taxes and order: deposit + stages + releases are the contract', () => {
-    const nets = fc.array(fc.tuple(fc.constantFrom('20', '10', '7.7'), fc.integer({ min: -5_000, max: 9_000_000 })), {
+  it('have a line even where a claim comes to nothing without its tax: 12 % of 0.04 at 25 %', () => {
+    const tiny = partOf([['25', 4]], { deposit_percent: 0, stages_percent: [12, 88], retention_percent: 0 });
+    const invoices = invoicedInTurn(tiny);
+    expect(invoices.map(({ due_minor }) => due_minor)).toEqual([1, 4]);
+    expect(workedFor(tiny, invoices[0].claim)).toMatchObject({ lines: [{ price: '0.00' }], rounding_minor: 1 });
+  });
+
+  it('fall due as paper and review promise, claim by claim, whatever the contract, its taxes and its plan', () => {
+    const small = fc.array(fc.tuple(fc.constantFrom('20', '25', 'E'), fc.integer({ min: -9, max: 60 })), {
       minLength: 1,
       maxLength: 3,
     });
-    const plans = fc.record({
-      deposit_percent: fc.integer({ min: 0, max: 50 }),
-      retention_percent: fc.integer({ min: 0, max: 20 }),
-      stages_percent: fc.constantFrom([100], [40, 40, 20], [33.3, 33.3, 33.4], [1, 99]),
-    });
     fc.assert(
-      fc.property(nets, plans, (categories, chosen) => {
+      fc.property(fc.oneof(anyNets, small), anyPlan, (categories, chosen) => {
+        const any = partOf(categories, chosen);
+        const rows = promisedFor(any);
+        for (const [claim, promised_minor] of rows) {
+          const isNothing = claimedAmounts(any, claim).length === 0;
+          expect(isNothing ? 0 : workedFor(any, claim).totals.due_minor).toBe(promised_minor);
+        }
+        expect(sumMinor(rows.map(([, promised_minor]) => promised_minor))).toBe(any.gross_minor);
+      }),
+      { numRuns: 500 },
+    );
+  });
+
+  it('round by a few minor units at most: what rounding the shares and their taxes may move', () => {
+    fc.assert(
+      fc.property(anyNets, anyPlan, (categories, chosen) => {
+        const any = partOf(categories, chosen);
+        // A claim is up to six rounded amounts under each tax, and six of the gross.
+        const most_minor = 7 * (any.taxes.length + 1);
+        for (const [claim] of promisedFor(any))
+          expect(Math.abs(claimRounding(any, claim))).toBeLessThanOrEqual(most_minor);
+      }),
+    );
+  });
+
+  it('agree in whatever plan, taxes and order: deposit + stages + releases are the contract', () => {
+    fc.assert(
+      fc.property(anyNets, anyPlan, (categories, chosen) => {
         const any = partOf(categories, chosen);
         const invoices = invoicedInTurn(any);
         expect(dueOf(invoices)).toBe(any.gross_minor);

@@ -1,8 +1,9 @@
 import type { Contract, ContractPart } from '#shared/agreements/contract';
-import { claimedAmounts, type StageClaim } from '#shared/invoices/stage-claim';
+import { claimedAmounts, claimedDue, type StageClaim } from '#shared/invoices/stage-claim';
 import { uncoveredWork, type WorkSpan } from '#shared/invoices/uncovered-work';
 import { cumulativePercents } from '#shared/money/cumulative-parts';
 import { D, type MinorUnits } from '#shared/money/decimal';
+import { safeMinor } from '#shared/money/safe-minor';
 import { sumMinor } from '#shared/money/sum-minor';
 import { taxByCategory } from '#shared/money/tax-by-category';
 
@@ -16,7 +17,7 @@ export interface ClaimingInvoice {
   readonly credited_minor: MinorUnits;
 }
 
-/** What may be invoiced next of a part, and what it comes to. `name` is that of a planned stage, empty for everything else. */
+/** What may be invoiced next of a part, and what it comes to: its lines without tax, and what falls due. `name` is that of a planned stage, empty for everything else. */
 export interface NextClaim {
   readonly claim: StageClaim;
   readonly name: string;
@@ -30,7 +31,10 @@ export interface PartAccount {
   readonly invoiced_minor: MinorUnits;
   readonly credited_minor: MinorUnits;
   readonly left_minor: MinorUnits;
+  /** Credited of invoices that stand: what they claimed is not offered again unless the rest of them is credited too. */
+  readonly creditedInPart_minor: MinorUnits;
   readonly next: readonly NextClaim[];
+  /** Whether every claim is issued and nothing is left to invoice. */
   readonly isComplete: boolean;
 }
 
@@ -53,8 +57,8 @@ const claimKey = (claim: StageClaim): string =>
 const spanOf = ({ claim }: ClaimingInvoice): WorkSpan[] =>
   claim.of === 'work' ? [{ from: new D(claim.from_percent), to: new D(claim.to_percent) }] : [];
 
-/** Net and gross of what a claim would be invoiced at, taxed as an invoice of its own. */
-export function claimTotals(part: ContractPart, claim: StageClaim): { net_minor: MinorUnits; gross_minor: MinorUnits } {
+/** Net and gross of the lines of a claim, taxed as an invoice of its own; what falls due differs by the rounding. */
+function linesTotals(part: ContractPart, claim: StageClaim): { net_minor: MinorUnits; gross_minor: MinorUnits } {
   const { net_minor, gross_minor } = taxByCategory(
     claimedAmounts(part, claim).map(({ tax, work_minor, recovered_minor, retained_minor }) => ({
       tax,
@@ -63,6 +67,13 @@ export function claimTotals(part: ContractPart, claim: StageClaim): { net_minor:
   );
   return { net_minor, gross_minor };
 }
+
+/**
+ * What the invoice of a claim is rounded by (BT-114), in minor units: tax is worked once per category on the sum of an invoice, so it may
+ * differ from the tax within the payment that was promised. The rounding stands outside the tax, and what falls due is the promise.
+ */
+export const claimRounding = (part: ContractPart, claim: StageClaim): MinorUnits =>
+  safeMinor(claimedDue(part, claim) - linesTotals(part, claim).gross_minor);
 
 /** The stages of the plan as far as no invoice claims them; a stage that is claimed in part is left with the rest, one that comes to nothing is left out. */
 function openWork(part: ContractPart, claiming: readonly ClaimingInvoice[]): { claim: StageClaim; name: string }[] {
@@ -95,29 +106,20 @@ function openClaims(part: ContractPart, claiming: readonly ClaimingInvoice[]): {
 export function partAccount(part: ContractPart, invoices: readonly ClaimingInvoice[]): PartAccount {
   const own = invoices.filter(({ issueId }) => issueId === part.issueId);
   const issued = own.filter(({ isIssued }) => isIssued);
-  const next = openClaims(part, own.filter(isClaiming)).map((open) => ({ ...open, ...claimTotals(part, open.claim) }));
+  const claiming = own.filter(isClaiming);
+  const next = openClaims(part, claiming).map((open) => ({
+    ...open,
+    net_minor: linesTotals(part, open.claim).net_minor,
+    gross_minor: claimedDue(part, open.claim),
+  }));
   const invoiced_minor = sumMinor(issued.map((invoice) => invoice.due_minor));
   const credited_minor = sumMinor(issued.map((invoice) => invoice.credited_minor));
+  const left_minor = sumMinor([part.gross_minor, -invoiced_minor, credited_minor]);
   return {
-    issueId: part.issueId,
-    invoiced_minor,
-    credited_minor,
-    left_minor: sumMinor([part.gross_minor, -invoiced_minor, credited_minor]),
-    next,
-    isComplete: next.length === 0 && own.filter(isClaiming).every(({ isIssued }) => isIssued),
+    ...{ issueId: part.issueId, invoiced_minor, credited_minor, left_minor, next },
+    creditedInPart_minor: sumMinor(claiming.map((invoice) => invoice.credited_minor)),
+    isComplete: next.length === 0 && left_minor === 0 && claiming.every(({ isIssued }) => isIssued),
   };
-}
-
-/**
- * What the invoice of a claim is rounded by (BT-114), in minor units: 0, but for the one that completes its part the minor units by which
- * the taxes of single invoices differ from the tax of the contract, so that all that falls due is the part's gross exactly.
- */
-export function claimRounding(part: ContractPart, claim: StageClaim, others: readonly ClaimingInvoice[]): MinorUnits {
-  const standing = others.filter((other) => other.issueId === part.issueId && other.isIssued && isClaiming(other));
-  const own = { invoiceId: '', issueId: part.issueId, claim, isIssued: true, due_minor: 1, credited_minor: 0 };
-  if (openClaims(part, [...standing, own]).length > 0) return 0;
-  const due_minor = sumMinor(standing.map((other) => other.due_minor));
-  return sumMinor([part.gross_minor, -due_minor, -claimTotals(part, claim).gross_minor]);
 }
 
 /** Where a contract stands as a whole, given every invoice that claims something of it; whole minor units, with tax. */

@@ -25,12 +25,13 @@ const lumpLine = ({ id, name, amount_minor, tax }: Amount, digits: number): Invo
   price: textOf(Math.abs(amount_minor), digits),
 });
 
-/** The lines of a claim under each tax: the work, then what is recovered of the deposit and what is held back as quantities of −1. */
+/** The lines of a claim under each tax: the work, then what is recovered of the deposit and what is held back as quantities of −1; one at least. */
 export function stageLines(amounts: readonly ClaimedAmount[], names: StageLineNames, digits: number): InvoiceLine[] {
   const lines = amounts.flatMap(({ tax, work_minor, recovered_minor, retained_minor }, place) => [
     { id: `work-${place + 1}`, name: names.work, amount_minor: work_minor, tax },
     { id: `recovered-${place + 1}`, name: names.recovered, amount_minor: -recovered_minor, tax },
     { id: `retained-${place + 1}`, name: names.retained, amount_minor: -retained_minor, tax },
   ]);
-  return lines.filter(({ amount_minor }) => amount_minor !== 0).map((line) => lumpLine(line, digits));
+  const some = lines.filter(({ amount_minor }) => amount_minor !== 0);
+  return (some.length > 0 ? some : lines.slice(0, 1)).map((line) => lumpLine(line, digits));
 }

@@ -6,6 +6,7 @@ import type { Snapshot } from '#shared/estimates/snapshot';
 import { words } from '../platform/http/words';
 import type { DecisionRow } from './decision-model';
 import type { DecisionRepository } from './decision-repository';
+import { frozenExemptions } from './frozen-exemptions';
 
 interface Parts {
   readonly decisions: DecisionRepository;
@@ -36,6 +37,7 @@ function planOf({ draft }: Snapshot): Pick<ContractPart, 'plan' | 'stageNames'> 
 
 function partOf(issue: FrozenIssue, decision: DecisionRow | undefined): ContractPart {
   const { row, estimate, snapshot } = issue;
+  const sums = sumsOf(issue, decision);
   return {
     issueId: row.id,
     estimateId: estimate.id,
@@ -43,7 +45,8 @@ function partOf(issue: FrozenIssue, decision: DecisionRow | undefined): Contract
     number: words('paper-number-letter', { number: estimate.number, letter: row.letter }),
     title: snapshot.draft.settings.title,
     acceptedOn: row.markedOn ?? snapshot.issuedOn,
-    ...sumsOf(issue, decision),
+    ...sums,
+    exemptions: frozenExemptions(snapshot, sums.choice),
     ...planOf(snapshot),
   };
 }

@@ -1,6 +1,7 @@
 import type { Actor } from '#shared/actor/actor';
 import type { InvoiceContent } from '#shared/invoices/invoice';
 import type { MinorUnits } from '#shared/money/decimal';
+import { sumMinor } from '#shared/money/sum-minor';
 import { Rejection } from '#shared/problems/rejection';
 import { refuseStale, type Seen } from '../platform/database/keeping';
 import { amountsOfDraft, exactAmounts, notIssued } from './exact-amounts';
@@ -94,13 +95,21 @@ export class DraftService {
     throw new Rejection('invalid', 'problem-invalid', { complaints });
   }
 
-  /** A credit note over the whole of a stage gives back its rounding too; over part of it there is none to give back. */
+  /** The credit note that credits the last line of a stage gives back its rounding too; before that there is none to give back. */
   private async knownRounding(row: InvoiceRow, content: InvoiceContent): Promise<MinorUnits> {
     if (row.claim) return row.roundingMinor;
     if (row.creditedInvoiceId === null) return 0;
-    const invoice = await this.parts.invoices.get(row.workshopId, row.creditedInvoiceId);
-    const { totals } = exactAmounts(content, row.currency, 0);
-    return invoice.claim && totals.gross_minor === invoice.grossMinor ? invoice.roundingMinor : 0;
+    const { workshopId, currency, creditedInvoiceId } = row;
+    const invoice = await this.parts.invoices.get(workshopId, creditedInvoiceId);
+    if (!invoice.claim) return 0;
+    const notes = await this.parts.invoices.list(workshopId, { where: { creditedInvoiceId, state: 'issued' } });
+    const { totals } = exactAmounts(content, currency, 0);
+    const isLast = sumMinor([totals.net_minor, ...notes.map(({ netMinor }) => netMinor)]) === invoice.netMinor;
+    const off_minor = sumMinor([invoice.taxMinor, -totals.tax_minor, ...notes.map(({ taxMinor }) => -taxMinor)]);
+    // Taxes of notes differ from the tax of the invoice by half a unit each; more than that was taxed otherwise.
+    const isTaxedAlike = Math.abs(off_minor) <= (notes.length + 1) * totals.categories.length;
+    if (!isLast || !isTaxedAlike) return 0;
+    return sumMinor([invoice.dueMinor, -invoice.creditedMinor, -totals.gross_minor]);
   }
 
   private record(actor: Actor, row: InvoiceRow, code: Deed): Promise<void> {

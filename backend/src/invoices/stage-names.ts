@@ -31,8 +31,9 @@ function workName(words: PaperWords, part: ContractPart, claim: StageClaim): str
   return words.say('invoice-line-stage', { ...values, stage: planned || words.say('invoice-line-whole-stage') });
 }
 
-/** A line is as long as a line of an invoice may be. */
-const shortened = (text: string): string => (text.length <= 160 ? text : `${text.slice(0, 159)}…`);
+/** Whole, or cut to as many letters as an invoice has room for. */
+export const shortened = (text: string, length = 160): string =>
+  text.length <= length ? text : `${text.slice(0, length - 1)}…`;
 
 /** What the lines of a claim are called on the invoice. */
 export const stageNames = (words: PaperWords, part: ContractPart, claim: StageClaim): StageLineNames => ({

@@ -15,7 +15,7 @@ import type { DraftService } from './draft-service';
 import type { InvoiceRow } from './invoice-model';
 import { wordsOf, type InvoiceParts } from './invoice-parts';
 import type { StageDayRepository } from './stage-day-repository';
-import { stageNames } from './stage-names';
+import { shortened, stageNames } from './stage-names';
 
 interface Parts extends InvoiceParts {
   readonly drafts: DraftService;
@@ -88,7 +88,7 @@ export class StageService {
     return this.parts.drafts.add(actor, content, {
       ...{ id: asked.invoiceId, kind: 'invoice', currency: contract.currency },
       ...{ claimIssueId: part.issueId, claim: asked.claim },
-      known_minor: claimRounding(part, asked.claim, claims),
+      known_minor: claimRounding(part, asked.claim),
     });
   }
 
@@ -96,8 +96,7 @@ export class StageService {
   async roundingOf(row: InvoiceRow): Promise<MinorUnits> {
     if (!row.claim || !row.claimIssueId || row.jobId === null) return 0;
     const { part } = await this.partOf(row.workshopId, row.jobId, row.claimIssueId);
-    const others = (await this.claims(row.workshopId, row.jobId)).filter(({ invoiceId }) => invoiceId !== row.id);
-    return claimRounding(part, row.claim, others);
+    return claimRounding(part, row.claim);
   }
 
   async plan(
@@ -150,8 +149,9 @@ export class StageService {
     const { terms } = await this.parts.settings.read(workshopId);
     return {
       ...{ clientId: contract.clientId, jobId: contract.jobId, buyer: buyerOf(client, workshop.country) },
-      ...{ pricesHold: 'net', allowancesCharges: [], exemptions: [], roundsToCash: false, note: '' },
+      ...{ pricesHold: 'net', allowancesCharges: [], roundsToCash: false, note: '' },
       ...{ deliveredOn: null, period: null, dueOn: null, terms },
+      exemptions: part.exemptions.map(({ code, reason }) => ({ code, reasonCode: '', reason: shortened(reason, 300) })),
       lines: stageLines(claimedAmounts(part, claim), names, currencyDigits(contract.currency)),
     };
   }

@@ -19,7 +19,7 @@ const contract: ContractAccountAnswer = {
     {
       ...{ issueId, kind: 'estimate', number: '2026-011-1', title: 'Pier table', acceptedOn: '2026-05-04' },
       ...{ net_minor: 1_000_00, gross_minor: 1_230_00, invoiced_minor: 400_00, credited_minor: 50_00 },
-      ...{ left_minor: 880_00, isComplete: false },
+      ...{ left_minor: 880_00, creditedInPart_minor: 0, isComplete: false },
       next: [
         { claim: { of: 'deposit' }, name: '', plannedOn: null, net_minor: 300_00, gross_minor: 369_00 },
         { claim: work, name: 'Delivered', plannedOn: '2026-07-01', net_minor: 415_45, gross_minor: 511_00 },
@@ -85,6 +85,18 @@ describe('JobInvoices', () => {
     await visit.press('Draft the invoice');
     const { claim } = visit.request('POST', stage).request.body as { claim: unknown };
     expect(claim).toEqual({ of: 'work', from_percent: '40', to_percent: '62.5' });
+  });
+
+  it('says what of a contract was credited in part, and how it may be invoiced again', async () => {
+    const visit = await BooksVisit.begin(TestJob, { path: 'job', address: '/job', roles: ['office'] });
+    const [part] = contract.parts;
+    const sums = { invoiced_minor: 1_230_00, credited_minor: 50_00, left_minor: 50_00 };
+    const parts = [{ ...part, ...sums, creditedInPart_minor: 50_00, next: [] }];
+    await visit.answer('GET', account, { contract: { ...contract, ...sums, parts } });
+    await visit.answer('GET', '/api/invoices', pageOf([]));
+    expect(visit.text).toContain('€50.00 of that credited since');
+    expect(visit.text).toContain('credit the rest of the same invoice');
+    expect(visit.text).not.toContain('All of it is invoiced.');
   });
 
   it('lets the estimator plan and draft nothing', async () => {
