@@ -61,6 +61,7 @@ export class DryPage {
   protected readonly programme = computed(() => ({
     estimateId: this.store.head()?.id,
     version: this.store.head()?.version,
+    alternatives: this.store.settings()?.alternatives ?? [],
     sentLetter: this.store.issues().find(({ state }) => state === 'sent')?.letter,
     whatIfLots: this.lots.all().map(({ lotId, name }) => ({ lotId, name })),
     buildUps: this.store.card()?.buildUps.buildUps.map(({ id, name }) => ({ id, name })) ?? [],

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, effect, inject, input, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import type { Climate } from '#shared/drying/climate';
+import { chosenNames } from '#shared/estimates/chosen-names';
 import { Formats } from '../../core/formats/formats';
 import { Words } from '../../core/formats/words';
 import { Session } from '../../core/session/session';
@@ -57,6 +58,8 @@ export class EstimateProgramme {
   readonly version = input(0);
   /** The issue that stands with the client, if there is one. */
   readonly sentLetter = input<string>();
+  /** What is offered beside the base, in its order. */
+  readonly alternatives = input<readonly { readonly id: string; readonly name: string }[]>([]);
   readonly whatIfLots = input<readonly { readonly lotId: string; readonly name: string }[]>([]);
   readonly buildUps = input<readonly { readonly id: string; readonly name: string }[]>([]);
   readonly shopAir = input<Climate>();
@@ -81,6 +84,15 @@ export class EstimateProgramme {
   protected readonly progress = computed(() => this.planWords.progress());
   protected readonly proposed = computed(() => this.planWords.proposed());
   protected readonly helps = computed(() => this.planWords.helps());
+  /** The alternatives it is planned with; undefined where none are offered. */
+  protected readonly plannedWith = computed(() => {
+    const [offered, choice] = [this.alternatives(), this.store.answer()?.inputs.choice ?? []];
+    if (offered.length === 0) return undefined;
+    const names = chosenNames(offered, choice);
+    return names.length > 0
+      ? $localize`Planned with ${names.join(', ')}:names:`
+      : $localize`Planned without alternatives`;
+  });
   protected readonly isStale = computed(() => {
     const answer = this.store.answer();
     return answer !== undefined && answer.plan !== null && !answer.isCurrent;
