@@ -160,8 +160,8 @@ function peopleMayCall(endpoint: Endpoint): void {
 
 /** How a link closes: it ends by its day, or is taken back. */
 const closings = [
-  ['ended', 'ends_at = DATE_SUB(ends_at, INTERVAL 10 YEAR)'],
-  ['was taken back', 'revoked_at = created_at'],
+  ['ended', 'UPDATE client_accesses SET ends_at = DATE_SUB(ends_at, INTERVAL 10 YEAR) WHERE workshop_id = :workshopId'],
+  ['was taken back', 'UPDATE client_accesses SET revoked_at = created_at WHERE workshop_id = :workshopId'],
 ] as const;
 
 /** Every link of ours is closed while it is asked, and open again afterwards, so that whoever is refused is the one who is answered. */
@@ -172,7 +172,7 @@ async function withLinksClosed<T>(closing: string, ask: () => Promise<T>): Promi
     'SELECT id, ends_at AS endsAt, revoked_at AS revokedAt FROM client_accesses WHERE workshop_id = :workshopId',
     own,
   );
-  await database.execute(`UPDATE client_accesses SET ${closing} WHERE workshop_id = :workshopId`, own);
+  await database.execute(closing, own);
   try {
     return await ask();
   } finally {

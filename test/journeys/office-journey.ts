@@ -23,9 +23,10 @@ export async function papersOf({ api }: Walk, jobId: string): Promise<InvoiceSum
 /** The first thing that may be invoiced of a job, drafted and issued to an address. */
 export async function issueFirst(
   walk: Walk,
-  { page, see }: Person,
+  office: Person,
   { jobId, email }: { readonly jobId: string; readonly email: string },
 ): Promise<InvoiceSummary> {
+  const { page } = office;
   await page.goto(`${walk.address}/jobs/${jobId}`);
   await page
     .getByRole('button', { name: /^Draft the invoice/ })
@@ -35,7 +36,7 @@ export async function issueFirst(
   await page.getByLabel('E-mail address').fill(email);
   await page.getByLabel('Note').fill('With thanks for the order.');
   await page.getByText(/^kept/).waitFor();
-  await see('journey invoice draft');
+  await office.see('journey invoice draft');
   await page.getByRole('button', { name: 'Issue it' }).click();
   await page
     .getByRole('dialog')
