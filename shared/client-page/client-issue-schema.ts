@@ -3,7 +3,7 @@ import { questionSchema } from '#shared/agreements/question-schema';
 import { clientIssueSummarySchema } from '#shared/client-page/client-overview-schema';
 import { clientLetterheadSchema } from '#shared/client-page/client-letterhead-schema';
 import { clientPriceSchema } from '#shared/client-page/client-price-schema';
-import type { UsedBuildUp } from '#shared/documents/buildups-used';
+import type { UsedBuildUp } from '#shared/estimates/buildups-used';
 import { shapeSchema } from '#shared/measure/shape-schema';
 import { findingSchema } from '#shared/words/reason-schema';
 

@@ -82,11 +82,22 @@ export const keptChangesSchema = z.strictObject({
 });
 export type KeptChanges = z.infer<typeof keptChangesSchema>;
 
-/** An alternative by itself: its gross total and what it is more or less than the base, in minor units. */
+/** What one way of doing the work takes: booklets, hours of carving and gilding, and how long until it is ready. */
+export const alternativeTallySchema = z.strictObject({
+  booklets: z.number(),
+  hours: z.number(),
+  workingDays: z.number(),
+  weeks: z.number(),
+});
+export type AlternativeTally = z.infer<typeof alternativeTallySchema>;
+
+/** An alternative by itself: its gross total and what it is more or less than the base, in minor units, and what it takes. */
 export const alternativeTotalSchema = z.strictObject({
   id: identifier,
   gross_minor: z.int(),
   difference_minor: z.int(),
+  /** Issues made before it was kept have none. */
+  tally: alternativeTallySchema.optional(),
 });
 export type AlternativeTotal = z.infer<typeof alternativeTotalSchema>;
 

@@ -73,7 +73,8 @@ export const takeRateCard = endpoint({
 
 export const readAlternatives = endpoint({
   name: 'readAlternatives',
-  summary: 'Each alternative of the draft by itself: its gross total, and what it is more or less than the base',
+  summary:
+    'Each alternative of the draft by itself: its gross total, what it is more or less than the base, and the leaf, hours and days it takes',
   method: 'get',
   path: '/api/estimates/:estimateId/alternatives',
   callers: ['owner', 'estimator', 'office'],

@@ -1,4 +1,5 @@
 import type { Choice, Draft } from '#shared/estimates/draft';
+import type { AlternativeTotal } from '#shared/estimates/estimate-schema';
 import type { Figures } from '#shared/estimates/figures';
 import type { LengthUnit } from '#shared/units/length-unit';
 import type { RateCard } from '#shared/rate-cards/rate-card';
@@ -75,10 +76,6 @@ export interface Snapshot {
   readonly figures: Figures;
   /** Only where a plan was kept that still held when it was issued; issues made before there were programmes have none. */
   readonly programme?: SnapshotProgramme;
-  /** Each alternative by itself against the base: its own total and the difference, gross, in minor units. */
-  readonly alternatives: readonly {
-    readonly id: string;
-    readonly gross_minor: number;
-    readonly difference_minor: number;
-  }[];
+  /** Each alternative by itself against the base: its own total and the difference, gross, in minor units, and what it takes. */
+  readonly alternatives: readonly AlternativeTotal[];
 }

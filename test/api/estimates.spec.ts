@@ -227,7 +227,13 @@ describe('the totals of alternatives', () => {
     const ask = (role: 'owner' | 'office' | 'bench') => api.as(role).call(readAlternatives, { params: { estimateId } });
     const { items } = (await ask('office')).body as { items: AlternativeTotal[] };
     // 250.00 at 20 %, in whole cents; the lines of the base stay as they are.
-    expect(items).toEqual([{ id, gross_minor: expect.any(Number) as number, difference_minor: 300_00 }]);
+    expect(items).toMatchObject([{ id, difference_minor: 300_00 }]);
+    const { figures } = (await read('owner', estimateId)).body as CostedEstimate;
+    const { booklets, carving_hours, handsOn_hours, workingDays, weeks } = figures.tally;
+    expect(items[0].gross_minor).toBe(figures.price.gross_minor + 300_00);
+    // A crate needs no leaf, no carving and no coat.
+    const hours = carving_hours.likely + handsOn_hours.likely;
+    expect(items[0].tally).toEqual({ booklets, hours, workingDays, weeks });
     expect((await ask('owner')).body).toEqual({ items });
     expect((await ask('bench')).status).toBe(403);
     const issued = (await issue(sample)).body as { id: string };

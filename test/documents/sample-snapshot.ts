@@ -1,4 +1,5 @@
 import { calculatorVersion } from '#shared/estimates/calculator-version';
+import { alternativeTotal } from '#shared/estimates/alternative-total';
 import type { Choice, Draft } from '#shared/estimates/draft';
 import { estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
 import type { Figures } from '#shared/estimates/figures';
@@ -57,9 +58,6 @@ export function sampleSnapshot(
     card,
     choice,
     figures: choice.length === 0 ? base : figuresOf(draft, choice, at),
-    alternatives: draft.settings.alternatives.map(({ id }) => {
-      const { gross_minor } = figuresOf(draft, [id], at).price;
-      return { id, gross_minor, difference_minor: gross_minor - base.price.gross_minor };
-    }),
+    alternatives: draft.settings.alternatives.map(({ id }) => alternativeTotal(id, base, figuresOf(draft, [id], at))),
   };
 }

@@ -1,5 +1,6 @@
 import type { ClientIssue } from '#shared/client-page/client-issue-schema';
-import { buildUpsUsed, type UsedBuildUp } from '#shared/documents/buildups-used';
+import { alternativeZones } from '#shared/estimates/alternative-zones';
+import { buildUpsUsed, type UsedBuildUp } from '#shared/estimates/buildups-used';
 import type { Figures, ZoneFigures } from '#shared/estimates/figures';
 import type { Alternative } from '#shared/estimates/settings';
 import type { Snapshot } from '#shared/estimates/snapshot';
@@ -20,18 +21,6 @@ export const presentBuildUp = ({ buildUp, zoneIds, leaf, layers }: UsedBuildUp):
 
 const stripsOf = (zones: readonly ZoneFigures[]) => buildUpsUsed(zones).map(presentBuildUp);
 
-/** Zones that belong to an alternative: by themselves, or with their member. */
-function zonesOf({ draft }: Snapshot, figures: Figures, isIts: (id: string, alternativeId: string | null) => boolean) {
-  const ids = new Set(
-    draft.members.flatMap((member) =>
-      member.zones
-        .filter((zone) => isIts(zone.id, zone.alternativeId) || isIts(member.id, member.alternativeId))
-        .map(({ id }) => id),
-    ),
-  );
-  return figures.zones.filter(({ zoneId }) => ids.has(zoneId));
-}
-
 /** An alternative beside the base: what it comes to, how long it takes, and the strips of what it brings and takes away. */
 export function presentClientAlternative(
   snapshot: Snapshot,
@@ -40,8 +29,7 @@ export function presentClientAlternative(
 ): Shown {
   const { id, name, group, note, replaces } = alternative;
   const total = snapshot.alternatives.find((one) => one.id === id);
-  const before = zonesOf(snapshot, snapshot.figures, (item, of) => of === null && replaces.includes(item));
-  const after = own ? zonesOf(snapshot, own, (_, of) => of === id) : [];
+  const { before, after } = alternativeZones(snapshot.draft, alternative, { base: snapshot.figures, own });
   return {
     ...{ id, name, group, note, replaces: [...replaces] },
     gross_minor: total?.gross_minor ?? snapshot.figures.price.gross_minor,

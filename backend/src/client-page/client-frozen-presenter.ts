@@ -1,5 +1,5 @@
 import type { ClientIssue } from '#shared/client-page/client-issue-schema';
-import { buildUpsUsed } from '#shared/documents/buildups-used';
+import { buildUpsUsed } from '#shared/estimates/buildups-used';
 import { careCodes } from '#shared/documents/care-codes';
 import { clientCautions } from '#shared/documents/client-cautions';
 import type { Figures } from '#shared/estimates/figures';

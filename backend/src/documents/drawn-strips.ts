@@ -1,4 +1,4 @@
-import type { UsedBuildUp, UsedLayer } from '#shared/documents/buildups-used';
+import type { UsedBuildUp, UsedLayer } from '#shared/estimates/buildups-used';
 import type { Figure } from './paper/figure';
 import type { Pdf } from './paper/open-paper';
 import { stripFigure, type DrawnLayer } from './paper/strip-figure';

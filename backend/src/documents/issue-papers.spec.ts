@@ -135,7 +135,16 @@ describe('the estimate as a paper', () => {
     expect(text).toContain('3.5 m, by the rule: as measured');
     const [alternative] = full.alternatives;
     expect(alternative.difference_minor).toBeLessThan(0);
-    expect(text).toContain(`${money(alternative.gross_minor)} −${money(-alternative.difference_minor)}`);
+    const weeks = Math.ceil(alternative.tally?.weeks ?? 0);
+    expect(weeks).toBeGreaterThan(1);
+    expect(text).toContain(`${weeks} weeks ${money(alternative.gross_minor)} −${money(-alternative.difference_minor)}`);
+  });
+
+  it('says nothing of how long an alternative takes where the issue did not keep it', async () => {
+    const alternatives = full.alternatives.map(({ tally: _tally, ...total }) => total);
+    const text = textOfPaper(await estimateOf({ ...full, alternatives }));
+    expect(text).toContain('Total with it');
+    expect(text).not.toContain('Ready in');
   });
 
   it.each(['members', 'kinds'] as const)('comes by %s to sections that sum to the lines', async (presentation) => {

@@ -2,6 +2,7 @@ import { randomInt } from 'node:crypto';
 import { v7 as newId } from 'uuid';
 import type { Actor } from '#shared/actor/actor';
 import { audienceOf } from '#shared/actor/role';
+import { alternativeTotal } from '#shared/estimates/alternative-total';
 import type { Change } from '#shared/estimates/change-schema';
 import type { Choice, Draft } from '#shared/estimates/draft';
 import { draftInOrder } from '#shared/estimates/draft-in-order';
@@ -127,15 +128,9 @@ export class EstimateService {
     const alternatives = draft.settings.alternatives.filter(({ id }) => !isEmptyAlternative(draft, id));
     if (alternatives.length === 0) return [];
     const card = await this.cardOf(whole);
-    const gross = async (choice: Choice) =>
-      (await this.parts.risks.priced(inputOf(whole, card, choice))).price.gross_minor;
-    const base_minor = await gross([]);
-    return Promise.all(
-      alternatives.map(async ({ id }) => {
-        const gross_minor = await gross([id]);
-        return { id, gross_minor, difference_minor: gross_minor - base_minor };
-      }),
-    );
+    const worked = (choice: Choice) => this.parts.risks.priced(inputOf(whole, card, choice));
+    const base = await worked([]);
+    return Promise.all(alternatives.map(async ({ id }) => alternativeTotal(id, base, await worked([id]))));
   }
 
   /** Keeps a list of changes, all or nothing, and answers the figures of record. */

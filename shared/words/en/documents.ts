@@ -34,6 +34,8 @@ export const documents = {
   'paper-alternatives-note':
     '{chosen, select, none {Each is counted by itself against the total above, tax included.} other {Each is counted by itself against the work without any of them, tax included. Those the total above already holds are marked.}}',
   'paper-column-alternative': 'Instead',
+  'paper-column-ready-in': 'Ready in',
+  'paper-alternative-weeks': '{weeks, plural, one {one week} other {# weeks}}',
   'paper-column-total': 'Total with it',
   'paper-column-difference': 'Difference',
   'paper-one-of': '{group}: one of these',

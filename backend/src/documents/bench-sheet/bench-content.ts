@@ -1,4 +1,4 @@
-import { buildUpsUsed, type UsedBuildUp } from '#shared/documents/buildups-used';
+import { buildUpsUsed, type UsedBuildUp } from '#shared/estimates/buildups-used';
 import type { DryLot } from '#shared/estimates/dry-figures';
 import type { UseFigures, ZoneFigures } from '#shared/estimates/figures';
 import type { Member, Piece } from '#shared/estimates/member';

@@ -1,4 +1,4 @@
-import { buildUpsUsed, type UsedBuildUp } from '#shared/documents/buildups-used';
+import { buildUpsUsed, type UsedBuildUp } from '#shared/estimates/buildups-used';
 import { drawnMembers } from '../drawn-members';
 import { drawnStrip } from '../drawn-strips';
 import { figureRows, figureWidth } from '../paper/figure-rows';

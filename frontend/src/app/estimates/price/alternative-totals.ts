@@ -1,10 +1,11 @@
 import { Injectable, computed, inject, resource, signal } from '@angular/core';
 import { takeUntilDestroyed, toObservable } from '@angular/core/rxjs-interop';
 import { type Observable, debounceTime, forkJoin, map, of, switchMap } from 'rxjs';
+import { alternativeTally, alternativeTotal } from '#shared/estimates/alternative-total';
 import type { Choice, Draft } from '#shared/estimates/draft';
-import type { AlternativeTotal } from '#shared/estimates/estimate-schema';
 import { type EstimateInput, estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
-import type { Figures } from '#shared/estimates/figures';
+import type { AlternativeTotal } from '#shared/estimates/estimate-schema';
+import type { Figures, PricedFigures } from '#shared/estimates/figures';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { EstimateClient } from '../estimate-client';
 import { EstimateStore } from '../estimate-store';
@@ -27,6 +28,21 @@ interface Asked {
   readonly currency: string;
 }
 
+/** The base and each alternative by its id, worked on this page. */
+interface Worked {
+  readonly asked: Asked;
+  readonly base: Figures;
+  readonly own: ReadonlyMap<string, Figures>;
+}
+
+/** The base as an alternative stands beside it: gross, and what it takes. */
+export type BaseTotal = Pick<AlternativeTotal, 'gross_minor' | 'tally'>;
+
+const baseTotal = (figures: PricedFigures): BaseTotal => ({
+  gross_minor: figures.price.gross_minor,
+  tally: alternativeTally(figures),
+});
+
 /**
  * Each alternative worked by itself, and its difference to the base, as an issue would freeze it: on this page for those who see cost, by
  * the server for the office.
@@ -40,19 +56,26 @@ export class AlternativeTotals {
     params: () => this.toAsk(),
     loader: ({ params, abortSignal }) => this.client.alternatives(params.id, abortSignal),
   });
-  private readonly worked = signal<{ readonly asked: Asked; readonly totals: readonly AlternativeTotal[] } | undefined>(
-    undefined,
-  );
+  private readonly lastWorked = signal<Worked | undefined>(undefined);
 
   private readonly asked = computed<Asked | undefined>(() => {
     const [draft, card, currency] = [this.store.draft(), this.store.card(), this.store.head()?.currency];
     const isAsked = draft !== undefined && draft.settings.alternatives.length > 0;
     return isAsked && card && currency ? { draft, card, currency } : undefined;
   });
+  /** What was worked last on this page, with its zones; undefined where the server tells the totals. */
+  readonly worked = this.lastWorked.asReadonly();
+  /** The base beside which they stand; for whom the server tells them, that is what the estimate shows. */
+  readonly base = computed<BaseTotal | undefined>(() => {
+    const [worked, priced] = [this.worked()?.base, this.store.priced()];
+    if (worked) return baseTotal(worked);
+    return priced && !this.store.mayEdit() ? baseTotal(priced) : undefined;
+  });
   /** What was worked last, by id; the figures of a moment ago while `isPending`. */
-  readonly totals = computed(() => {
-    const told = this.told.hasValue() ? this.told.value() : [];
-    return new Map((this.worked()?.totals ?? told).map((total) => [total.id, total]));
+  readonly totals = computed<ReadonlyMap<string, AlternativeTotal>>(() => {
+    const [told, worked] = [this.told.hasValue() ? this.told.value() : [], this.worked()];
+    const own = worked && [...worked.own].map(([id, figures]) => alternativeTotal(id, worked.base, figures));
+    return new Map((own ?? told).map((total) => [total.id, total]));
   });
   readonly isPending = computed(
     () => this.told.isLoading() || (this.asked() !== undefined && this.worked()?.asked !== this.asked()),
@@ -65,7 +88,7 @@ export class AlternativeTotals {
         switchMap((asked) => (asked ? this.work(asked) : of(undefined))),
         takeUntilDestroyed(),
       )
-      .subscribe((worked) => this.worked.set(worked));
+      .subscribe((worked) => this.lastWorked.set(worked));
   }
 
   /** Asked anew with every version of the estimate. */
@@ -75,19 +98,11 @@ export class AlternativeTotals {
     return isTold && head ? { id: head.id, version: head.version } : undefined;
   }
 
-  private work(asked: Asked) {
+  private work(asked: Asked): Observable<Worked> {
     const ids = asked.draft.settings.alternatives.map(({ id }) => id);
-    const gross = (choice: Choice) =>
-      workedBy(this.startRisk, { ...asked, choice }).pipe(map((figures) => figures.price.gross_minor));
-    return forkJoin([gross([]), ...ids.map((id) => gross([id]))]).pipe(
-      map(([base, ...others]) => ({
-        asked,
-        totals: ids.map((id, place) => ({
-          id,
-          gross_minor: others[place],
-          difference_minor: others[place] - base,
-        })),
-      })),
+    const figures = (choice: Choice) => workedBy(this.startRisk, { ...asked, choice });
+    return forkJoin([figures([]), ...ids.map((id) => figures([id]))]).pipe(
+      map(([base, ...others]) => ({ asked, base, own: new Map(ids.map((id, place) => [id, others[place]])) })),
     );
   }
 }

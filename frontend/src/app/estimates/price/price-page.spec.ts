@@ -43,6 +43,8 @@ describe('PricePage', () => {
       }),
     );
 
+  const amount = (amount_minor: number) => (amount_minor / 100).toLocaleString('en-GB', { minimumFractionDigits: 2 });
+
   async function type(label: string, text: string): Promise<void> {
     field(label).value = text;
     field(label).dispatchEvent(new Event('input'));
@@ -420,14 +422,26 @@ describe('PricePage', () => {
         figures,
         settings: { ...settings, alternatives: [plain] },
       } as unknown as typeof whole);
-    server.totals = [{ id: ids.leg, gross_minor: 123_456, difference_minor: -2_000 }];
+    const { booklets, carving_hours, handsOn_hours, workingDays, weeks } = figures.tally;
+    const tally = { booklets: booklets + 2, hours: carving_hours.likely + handsOn_hours.likely, workingDays, weeks };
+    const gross_minor = figures.price.gross_minor - 2_000;
+    server.totals = [{ id: ids.leg, gross_minor, difference_minor: -2_000, tally }];
     await open('alternatives', ['office']);
     await settle();
-    expect(grid()).toEqual([['Bare back', '1,234.56', '−20.00']]);
+    const [base, bare] = grid();
+    expect([base[0], Number(base[1]), base[5]]).toEqual(['The base', booklets, amount(figures.price.gross_minor)]);
+    expect([bare[0], bare[1]]).toEqual(['Bare back', `${booklets + 2}+2`]);
+    expect(bare.slice(2, 5).every((cell) => cell.endsWith('as the base'))).toBe(true);
+    expect(bare[5]).toBe(`${amount(gross_minor)}−20.00`);
     expect(element().querySelector('.content button')).toBeNull();
   });
 
   describe('takes alternatives', () => {
+    const sections = () =>
+      [...element().querySelectorAll('app-alternative-sections section')].map((side) => [
+        spoken(side.querySelector('h4')),
+        side.querySelectorAll('svg').length,
+      ]);
     const zoneOf = (id: string) => store.members().find((member) => member.id === id)!.zones;
 
     async function begin(): Promise<void> {
@@ -447,10 +461,45 @@ describe('PricePage', () => {
       const { id: _id, ...content } = bare;
       store.changeMember(ids.edge, { ...content, zones: [base, { ...copy, buildUpId: 'bare', leafId: null }] });
       await settle(1500);
-      const [, gross, difference] = grid()[0];
-      const own_minor = Math.round(Number(gross.replace(/,/g, '')) * 100);
-      expect(own_minor).toBeLessThan(store.priced()!.price.gross_minor);
-      expect(difference.startsWith('−')).toBe(true);
+      const [first, other] = grid();
+      const minor = (cell: string) => Math.round(Number(cell.replace(/,/g, '').replace('−', '-')) * 100);
+      expect(minor(first[5])).toBe(store.priced()!.price.gross_minor);
+      const [gross, difference] = other[5].split(/(?=−)/);
+      expect(minor(gross)).toBeLessThan(minor(first[5]));
+      expect(minor(difference)).toBe(minor(gross) - minor(first[5]));
+      // No leaf on bare wood: what the base has of it, the other is less.
+      expect(other[1]).toBe(`0−${first[1]}`);
+      for (const cell of other.slice(2, 5)) expect(cell).toMatch(/^[\d.]+−[\d.]+$/);
+      expect(sections()).toEqual([
+        ['In the base', 1],
+        ['With “Another way”', 0],
+      ]);
+    });
+
+    it('with the sections of its build-ups beside those of the base', async () => {
+      await begin();
+      [...element().querySelectorAll<HTMLButtonElement>('.base button')][1].click();
+      await settle(1500);
+      expect(sections()).toEqual([
+        ['In the base', 1],
+        ['With “Another way”', 1],
+      ]);
+      const [base, own] = [...element().querySelectorAll('app-alternative-sections svg')];
+      expect(own.getAttribute('aria-label')).toBe(base.getAttribute('aria-label'));
+    });
+
+    it('and says so where two of them take the place of the same zone', async () => {
+      await begin();
+      const { alternatives } = store.settings()!;
+      const two = ['Oil', 'Silver'].map((name, place) => ({
+        ...alternatives[0],
+        ...{ id: [ids.leg, ids.piece][place], name, replaces: [zoneOf(ids.edge)[0].id] },
+      }));
+      store.changeSettings({ alternatives: two });
+      await settle(1500);
+      expect(spoken(element().querySelector('app-alternatives-part app-finding-list'))).toContain(
+        '“Oil” and “Silver” may be chosen together, and both take the place of “Top edge, All of it”',
+      );
     });
 
     it('and removes one with all that stands in it alone', async () => {

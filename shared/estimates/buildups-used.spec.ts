@@ -1,4 +1,4 @@
-import { buildUpsUsed } from '#shared/documents/buildups-used';
+import { buildUpsUsed } from '#shared/estimates/buildups-used';
 import type { ZoneFigures } from '#shared/estimates/figures';
 
 const layer = (stepId: string, coats: number, thickness = coats) => ({
