@@ -35,6 +35,11 @@ export const boardJobSchema = z.strictObject({
 
 export type BoardJob = z.infer<typeof boardJobSchema>;
 
+/** Accepted, and without a plan: its work stands on no day, and in no load. */
+const unplannedSchema = boardJobSchema.pick({
+  ...{ jobId: true, estimateId: true, number: true, title: true, clientName: true },
+});
+
 /** Work of one grade in one week against the hands there are; shares of people with several grades go where they are needed. */
 export const gradeLoadSchema = z.strictObject({
   gradeId: z.string(),
@@ -61,6 +66,7 @@ export const boardSchema = z.strictObject({
   firstDay: day,
   lastDay: day,
   jobs: z.array(boardJobSchema),
+  unplanned: z.array(unplannedSchema),
   people: z.array(z.strictObject({ id: z.string(), name: z.string() })),
   load: z.array(gradeLoadSchema),
   clashes: z.array(clashSchema),

@@ -65,12 +65,17 @@ function itemTask(
   const times = { release_minutes: 0, pinned_minutes: null, happened: null };
   const { name } = member;
   const whole = { lot: name, pieceId: member.pieceId, piece: names.pieceName(member.pieceId), memberIds: [member.id] };
+  const grade = names.gradeName(gradeId);
+  const taskName = kind === 'carved' ? name : `${name} (${grade})`;
   const one = { coat: 1, coats: 1, portion: 1, portions: 1 };
   return {
-    task: { id, name, lotId: member.id, gradeId, handsOn_minutes, crew, mostPeople, isBreakable: true, ...times },
+    task: {
+      ...{ id, name: taskName, lotId: member.id, gradeId, handsOn_minutes, crew, mostPeople },
+      ...{ isBreakable: true, ...times },
+    },
     item: {
       ...{ taskId: id, lotId: member.id, ...whole, kind, stepId: null, name, ...one, gradeId },
-      ...{ grade: names.gradeName(gradeId), handsOn_minutes },
+      ...{ grade, handsOn_minutes },
     },
   };
 }

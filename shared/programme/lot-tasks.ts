@@ -15,6 +15,8 @@ export interface LotToPlan {
   readonly buildUp: BuildUp;
   readonly name: string;
   readonly piece: string;
+  /** What the lot is called beside one of its tasks. */
+  readonly shortName: string;
   readonly memberIds: readonly string[];
   /** Identical pieces of its members together: so many people may be at it at most. */
   readonly pieces: number;
@@ -108,7 +110,7 @@ function coatTask(step: SequenceStep, coat: number, { lot, at }: { lot: LotToPla
   const id = coatTaskId(lotId, { stepId, portion: at.portion, coat });
   const task = {
     ...{ id, lotId, gradeId, handsOn_minutes },
-    name: coats > 1 ? `${name} ${coat}/${coats}` : name,
+    name: `${coats > 1 ? `${name} ${coat}/${coats}` : name} (${lot.shortName})`,
     ...handsOf(step, lot),
     isBreakable: dryWork.includes(kind) || (!at.isTied && !fitsDay),
     ...{ release_minutes: 0, pinned_minutes: null, happened: null },

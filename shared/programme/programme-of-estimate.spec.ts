@@ -71,9 +71,13 @@ describe('The programme of an estimate', () => {
   it('has every coat of every step, and the carving by grade that ends in one moment', () => {
     // Four coats on finished carving, as the start card has it.
     const names = made.request.tasks.filter(({ id }) => id.includes('/gesso/')).map(({ name }) => name);
-    expect(names).toEqual(['Gesso 1/4', 'Gesso 2/4', 'Gesso 3/4', 'Gesso 4/4']);
+    // A lot without a name is called by its piece and build-up, so that a sentence about its coat says whose coat it is.
+    expect(names).toEqual(['1/4', '2/4', '3/4', '4/4'].map((coat) => `Gesso ${coat} (Base: Water gilding, burnished)`));
     const carving = made.items.filter(({ kind }) => kind === 'carving').map(({ gradeId }) => gradeId);
     expect(new Set(carving).size).toBe(carving.length);
+    const carvers = made.request.tasks.filter(({ id, crew }) => id.startsWith('member/carv') && crew > 0);
+    expect(carvers.length).toBeGreaterThan(0);
+    expect(new Set(carvers.map(({ name }) => name)).size).toBe(carvers.length);
     expect(made.request.tasks.find(({ id }) => id === 'member/carved')).toMatchObject({ crew: 0, handsOn_minutes: 0 });
     expect(made.findings).toEqual([]);
   });

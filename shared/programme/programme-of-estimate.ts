@@ -74,9 +74,11 @@ function lotToPlan(lot: LotWork, asked: ProgrammeOfEstimateInput): LotToPlan[] {
   const sequence = lotSequence(lot, referenceClimate, card);
   if (!buildUp || sequence.steps.length === 0) return [];
   const members = membersOf(work).filter(({ id }) => memberIds.includes(id));
+  const piece = nameIn(pieces, lot.pieceId);
   return [
     {
-      ...{ sequence, buildUp, memberIds, piece: nameIn(pieces, lot.pieceId) },
+      ...{ sequence, buildUp, memberIds, piece },
+      shortName: lot.name === '' ? `${piece}: ${buildUp.name}` : lot.name,
       name: lot.name === '' ? buildUp.name : `${lot.name}: ${buildUp.name}`,
       pieces: members.reduce((sum, { count }) => sum + count, 0),
       input: inputs.lots.find(({ lotId }) => lotId === lot.id) ?? null,

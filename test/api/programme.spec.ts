@@ -139,9 +139,13 @@ describe('A programme', () => {
     const weekLater = plan.tasks.map((task) =>
       /\/burnish\//.test(task.taskId) ? { ...task, start_minutes: task.start_minutes + 7 * 1440 } : task,
     );
-    expect(await refuse(weekLater)).toContain('Burnish comes too late after Wet and lay: the window has closed.');
+    expect(await refuse(weekLater)).toContainEqual(
+      expect.stringMatching(/^Burnish \((.+)\) comes too late after Wet and lay \(\1\): the window has closed\.$/),
+    );
     const atOnce = plan.tasks.map((task) => ({ ...task, start_minutes: plan.tasks[0].start_minutes }));
-    expect(await refuse(atOnce)).toContain('Gesso 1/4 starts before Size coat lets it.');
+    expect(await refuse(atOnce)).toContainEqual(
+      expect.stringMatching(/^Gesso 1\/4 \((.+)\) starts before Size coat \(\1\) lets it\.$/),
+    );
     // A start of the next century holds nobody up, and is refused for what it is.
     const far = plan.tasks.map((task, place) => (place === 0 ? { ...task, start_minutes: 49_000_000 } : task));
     const before = process.cpuUsage();
@@ -317,6 +321,21 @@ describe('The board', () => {
     expect(people.map(({ name }) => name)).toContain(hands[0].name);
     expect(hands[0].estimateIds).toEqual([one.estimateId, other.estimateId].sort());
     expect((await programmeOf(api.ours, other.estimateId)).isCurrent).toBe(false);
+  });
+
+  test('names what was accepted without a plan, until it is planned', async () => {
+    await shopWith(api.ours, api.ours.people.bench);
+    const { jobId, estimateId } = await sampleEstimate(api.ours);
+    expect((await board()).unplanned).toEqual([]);
+    await markedIssue(api.ours, api, { estimateId, state: 'accepted' });
+    const { unplanned, jobs } = await board();
+    expect(unplanned).toMatchObject([{ jobId, estimateId }]);
+    expect(unplanned[0].title).not.toBe('');
+    expect(jobs).toEqual([]);
+    expect((await board(api.theirs.people.owner.visitor)).unplanned).toEqual([]);
+    await keptPlan(api.ours, estimateId);
+    const planned = await board();
+    expect([planned.unplanned, planned.jobs.map((job) => job.estimateId)]).toEqual([[], [estimateId]]);
   });
 
   test('holds a slot for an offer that was sent until its validity ends, and no longer', async () => {

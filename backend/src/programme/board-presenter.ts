@@ -1,10 +1,11 @@
-import type { BoardJob } from '#shared/programme/board-schema';
+import type { BoardAnswer, BoardJob } from '#shared/programme/board-schema';
 import { instantOf, type ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { TaskMark } from '#shared/programme/programme-inputs';
 import type { ProgrammeItem } from '#shared/programme/programme-item';
 import type { PlannedTask } from '#shared/programme/programme-plan';
 import type { MomentSpan } from '#shared/programme/shop-calendar';
 import type { JobName } from './job-names';
+import type { UnplannedRow } from './programme-repository';
 import type { PromisedJob } from './promised-jobs';
 
 interface BoardAt {
@@ -34,6 +35,15 @@ function presentTask(item: ProgrammeItem, task: PlannedTask, { frame, marks }: B
     state: stateOf(marks.find((mark) => mark.taskId === taskId)),
   };
 }
+
+/** A job that was accepted and is not planned yet. */
+export const presentUnplanned = (
+  { jobId, estimateId }: UnplannedRow,
+  name: JobName | undefined,
+): BoardAnswer['unplanned'][number] => {
+  const { number = '', title = '', clientName = '' } = name ?? {};
+  return { jobId, estimateId, number, title, clientName };
+};
 
 /** One job on the board: its tasks in the order of its lots, with where they stand. */
 export function presentBoardJob(job: PromisedJob, at: BoardAt): BoardJob {

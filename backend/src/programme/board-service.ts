@@ -15,7 +15,7 @@ import type { ShopCalendar } from '#shared/programme/shop-calendar';
 import type { Accounts } from '../accounts';
 import type { Jobs } from '../jobs';
 import type { RateCards } from '../rate-cards';
-import { presentBoardJob } from './board-presenter';
+import { presentBoardJob, presentUnplanned } from './board-presenter';
 import { jobNames } from './job-names';
 import type { MarkRow } from './mark-model';
 import type { MarkRepository } from './mark-repository';
@@ -75,7 +75,8 @@ export class BoardService {
       workshopId,
       jobs.map((job) => job.estimateId),
     );
-    const names = await jobNames(this.parts.jobs, workshopId, jobs);
+    const unplanned = await this.parts.promises.unplanned(workshopId);
+    const names = await jobNames(this.parts.jobs, workshopId, [...jobs, ...unplanned]);
     return {
       timeZone: frame.timeZone,
       firstDay: frame.firstDay,
@@ -83,6 +84,7 @@ export class BoardService {
       jobs: jobs.map((job) =>
         presentBoardJob(job, { name: names.get(job.jobId), frame, marks: marksOf(marks, job.estimateId) }),
       ),
+      unplanned: unplanned.map((row) => presentUnplanned(row, names.get(row.jobId))),
       people: shop.people.map(({ id, name }) => ({ id, name })),
       load: await this.load(workshopId, board),
       clashes: clashes(board),

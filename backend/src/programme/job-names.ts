@@ -1,5 +1,4 @@
 import { jobNumber, type Jobs } from '../jobs';
-import type { PromisedJob } from './promised-jobs';
 
 /** What a job is called wherever its work is shown. */
 export interface JobName {
@@ -12,7 +11,7 @@ export interface JobName {
 export async function jobNames(
   jobs: Pick<Jobs, 'job'>,
   workshopId: string,
-  promised: readonly Pick<PromisedJob, 'jobId'>[],
+  promised: readonly { readonly jobId: string }[],
 ): Promise<ReadonlyMap<string, JobName>> {
   const ids = [...new Set(promised.map(({ jobId }) => jobId))];
   const rows = await Promise.all(ids.map((id) => jobs.job(workshopId, id)));

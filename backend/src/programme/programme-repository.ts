@@ -12,6 +12,12 @@ export interface PromisedRow {
   readonly kept: Buffer;
 }
 
+/** An accepted estimate that has no plan. */
+export interface UnplannedRow {
+  readonly jobId: string;
+  readonly estimateId: string;
+}
+
 /**
  * Accepted: its newest decided issue is, and the job is not put away. Held: sent, neither declined nor replaced since, and the day has not passed;
  * so a hold ends by itself.
@@ -29,6 +35,16 @@ const promisedSql = `
       OR (p.hold_until >= :today AND h.state = 'sent'))
   ORDER BY p.id`;
 
+/** Estimates of jobs that are not put away, with an accepted issue and without a plan. */
+const unplannedSql = `
+  SELECT e.id AS estimateId, e.job_id AS jobId
+  FROM estimates e
+  JOIN jobs j ON j.workshop_id = e.workshop_id AND j.id = e.job_id
+  LEFT JOIN programmes p ON p.workshop_id = e.workshop_id AND p.id = e.id
+  WHERE e.workshop_id = :workshopId AND p.kept IS NULL AND j.state <> 'finished'
+    AND EXISTS (SELECT 1 FROM issues i WHERE i.workshop_id = e.workshop_id AND i.estimate_id = e.id AND i.state = 'accepted')
+  ORDER BY e.id`;
+
 /** Programmes of estimates. */
 export class ProgrammeRepository extends WorkshopRows<ProgrammeRow> {
   constructor(private readonly database: Database) {
@@ -38,5 +54,10 @@ export class ProgrammeRepository extends WorkshopRows<ProgrammeRow> {
   /** What is promised on a day, without one estimate where it is being planned itself. */
   promised(workshopId: string, today: string, except = ''): Promise<PromisedRow[]> {
     return this.database.select<PromisedRow>(promisedSql, { workshopId, today, except });
+  }
+
+  /** What was accepted and is not planned yet. */
+  unplanned(workshopId: string): Promise<UnplannedRow[]> {
+    return this.database.select<UnplannedRow>(unplannedSql, { workshopId });
   }
 }

@@ -4,7 +4,7 @@ import { promisedWork, type PromisedPlan } from '#shared/programme/promised-plan
 import type { PromisedWork } from '#shared/programme/promised-work';
 import { shiftedPlan } from '#shared/programme/shifted-plan';
 import { type KeptPlan, unpackedPlan } from './kept-plan';
-import type { ProgrammeRepository, PromisedRow } from './programme-repository';
+import type { ProgrammeRepository, PromisedRow, UnplannedRow } from './programme-repository';
 
 /** A promised job as its plan was kept, told in the minutes of another frame. */
 export interface PromisedJob extends PromisedPlan {
@@ -44,6 +44,11 @@ export class PromisedJobs {
 
   async all(workshopId: string, today: string, frame: ProgrammeFrame): Promise<PromisedJob[]> {
     return (await this.programmes.promised(workshopId, today)).map((row) => promisedJob(row, frame));
+  }
+
+  /** What was accepted without a plan: promised too, and on no day. */
+  unplanned(workshopId: string): Promise<UnplannedRow[]> {
+    return this.programmes.unplanned(workshopId);
   }
 
   /** What others are promised, for an estimate that is planned around it. */

@@ -64,7 +64,9 @@ export class EstimateTally {
       {
         name: $localize`Dry`,
         figure: $localize`${this.formats.number(tally.weeks, 1)}:weeks: weeks`,
-        minor: this.readyBy() ?? $localize`${this.formats.number(tally.workingDays, 0)}:days: working days`,
+        minor:
+          this.readyBy() ??
+          $localize`${this.formats.number(tally.workingDays, 0)}:days: working days, one pair of hands a grade`,
         route: this.route('dry'),
       },
     ];
@@ -110,10 +112,10 @@ export class EstimateTally {
     return this.formats.signed(difference_minor, (size_minor) => this.formats.wholeMoney(size_minor));
   }
 
-  /** Once a programme is kept it says more than a count of days. */
+  /** A programme that is kept counts with the people there are, and says more than a count of days. */
   private readyBy(): string | undefined {
     const day = this.ready.day();
-    return day && $localize`by ${this.formats.day(day, 'short')}:day:`;
+    return day && $localize`planned, by ${this.formats.day(day, 'short')}:day:`;
   }
 
   private spread({ low, high }: Triple): string {

@@ -1,4 +1,5 @@
-import { minutesOf, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import { addDays } from '#shared/calendar/add-days';
+import { minutesOf, minutesOfDay, type ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { BoardAnswer, BoardJob } from '#shared/programme/board-schema';
 import type { MomentSpan } from '#shared/programme/shop-calendar';
 import type { Formats } from '../../core/formats/formats';
@@ -15,7 +16,11 @@ const spanOf = (at: { readonly startsAt: string; readonly endsAt: string }, fram
 export const openOf = ({ open }: BoardAnswer, frame: ProgrammeFrame): MomentSpan[] =>
   open.map((span) => spanOf(span, frame));
 
-/** Draws the jobs of the board as lines of a ribbon. */
+/** The minute at which the days of a board end; they begin at 0. */
+export const endOf = ({ lastDay }: BoardAnswer, frame: ProgrammeFrame): number =>
+  minutesOfDay(addDays(lastDay, 1), frame);
+
+/** Draws the jobs of the board as lines of a ribbon, with the work that falls into its days. */
 export class BoardLots {
   constructor(
     private readonly formats: Formats,
@@ -23,16 +28,21 @@ export class BoardLots {
     private readonly people: ReadonlyMap<string, string>,
   ) {}
 
-  of(jobs: readonly BoardJob[]): RibbonLot[] {
-    return jobs.map((job) => ({
-      id: job.estimateId,
-      name: job.title,
-      minor: this.standing(job),
-      link: ['/jobs', job.jobId],
-      tasks: job.tasks
+  of(board: BoardAnswer): RibbonLot[] {
+    const end_minutes = endOf(board, this.frame);
+    return board.jobs.map((job) => {
+      const tasks = job.tasks
         .map((task) => this.task(job, task))
-        .sort((one, other) => one.start_minutes - other.start_minutes),
-    }));
+        .filter((task) => task.start_minutes < end_minutes && (task.dryUntil_minutes ?? task.end_minutes) > 0)
+        .sort((one, other) => one.start_minutes - other.start_minutes);
+      const minor = tasks.length > 0 ? this.standing(job) : this.elsewhere(job);
+      return { id: job.estimateId, name: job.title, minor, link: ['/jobs', job.jobId], tasks };
+    });
+  }
+
+  private elsewhere({ startsAt, finishesAt }: BoardJob): string {
+    const [from, to] = [startsAt, finishesAt].map((at) => this.formats.dayOf(at, 'short'));
+    return $localize`${from}:from: to ${to}:to:`;
   }
 
   private standing({ standing, heldUntil, clientName }: BoardJob): string {

@@ -3,7 +3,7 @@ import { provideRouter } from '@angular/router';
 import type { BoardAnswer, BoardJob } from '#shared/programme/board-schema';
 import { signIn, words } from '../../../test/sign-in';
 import { NOW } from '../../core/now';
-import { AnsweringForSpecs, refusal, spoken } from '../answering-for-specs';
+import { AnsweringForSpecs, buttonIn, refusal, spoken } from '../answering-for-specs';
 import { StillObserver } from '../ribbon/ribbon-for-specs';
 import { BoardPage } from './board-page';
 
@@ -21,17 +21,18 @@ const job = (change: Partial<BoardJob> = {}): BoardJob => ({
 });
 const board = (change: Partial<BoardAnswer> = {}): BoardAnswer => ({
   ...{ timeZone: 'Europe/Dublin', firstDay: '2027-01-04', lastDay: '2027-02-01', clashes: [], load: [], open: [span] },
-  ...{ people: [{ id: 'gina', name: 'Gina' }], jobs: [job()] },
+  ...{ people: [{ id: 'gina', name: 'Gina' }], jobs: [job()], unplanned: [] },
   ...change,
 });
 
 describe('BoardPage', () => {
   let fixture: ComponentFixture<BoardPage>;
+  let server: AnsweringForSpecs;
   const element = () => fixture.nativeElement as HTMLElement;
 
   async function open(readBoard: () => unknown) {
     globalThis.ResizeObserver = StillObserver;
-    const server = new AnsweringForSpecs({ readBoard });
+    server = new AnsweringForSpecs({ readBoard });
     const now = { provide: NOW, useValue: () => new Date('2027-01-04T09:00:00Z') };
     TestBed.configureTestingModule({ providers: [words, provideRouter([]), server.provider, now] });
     signIn(['owner']);
@@ -79,6 +80,34 @@ describe('BoardPage', () => {
     expect(spoken(element().querySelector('.over-list'))).toBe(
       'Gilder, week of 11 Jan: 50 h of work, and 40 h there are.',
     );
+  });
+
+  const unplanned = { jobId: 'j3', estimateId: 'e3', number: '27-003', title: 'Overmantel', clientName: 'Moss House' };
+
+  it('names what was accepted and is not planned, and leads to its programme', async () => {
+    await open(() => board({ unplanned: [unplanned], jobs: [] }));
+    expect(spoken(element())).not.toContain('Nothing is promised yet');
+    expect(spoken(element().querySelector('app-page-header'))).toContain('1 not planned yet');
+    const link = element().querySelector('app-unplanned-list a');
+    expect(spoken(link)).toBe('27-003 Overmantel');
+    expect(link?.getAttribute('href')).toBe('/jobs/j3/estimates/e3/dry?part=programme');
+  });
+
+  it('goes on to later weeks and back, and says of a job outside them when its work is', async () => {
+    const later = { firstDay: '2027-04-05', lastDay: '2027-10-03' };
+    await open(() => (server.of('readBoard').length === 2 ? board(later) : board()));
+    const press = async (text: string) => {
+      buttonIn(element(), text).click();
+      TestBed.tick();
+      await fixture.whenStable();
+      TestBed.tick();
+    };
+    await press('Later');
+    expect(spoken(element().querySelector('app-dated-ribbon .names .minor'))).toBe('5 Jan to 5 Jan');
+    expect(element().querySelectorAll('g.task')).toHaveLength(0);
+    await press('From this week');
+    expect(server.of('readBoard').map(({ query }) => query?.['from'])).toEqual([undefined, '2027-04-05', undefined]);
+    expect(element().querySelectorAll('g.task')).toHaveLength(1);
   });
 
   it('teaches what comes here, as long as nothing is promised', async () => {

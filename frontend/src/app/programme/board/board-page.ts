@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, inject, resource, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
+import { addDays } from '#shared/calendar/add-days';
 import { minutesOf, programmeFrame } from '#shared/programme/programme-frame';
 import type { BoardAnswer } from '#shared/programme/board-schema';
 import { Formats } from '../../core/formats/formats';
@@ -12,10 +13,13 @@ import { ProgrammeParts } from '../programme-parts';
 import { DatedRibbon } from '../ribbon/dated-ribbon';
 import { RibbonTable } from '../ribbon/ribbon-table';
 import { BoardClient } from './board-client';
-import { BoardLots, openOf } from './board-lots';
+import { BoardLots, endOf, openOf } from './board-lots';
 import { LoadTable } from './load-table';
+import { UnplannedList } from './unplanned-list';
 
 const weeks = 26;
+/** So far one goes at once: half of what is shown stays. */
+const step_days = 91;
 
 /** All accepted jobs and held offers on one calendar, the load by grade and week, and whatever is promised twice. */
 @Component({
@@ -30,6 +34,7 @@ const weeks = 26;
     RibbonTable,
     RouterLink,
     Skeleton,
+    UnplannedList,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './board-page.html',
@@ -42,30 +47,48 @@ export class BoardPage {
 
   protected readonly jobName = $localize`Job`;
   protected readonly chosen = signal<string | undefined>(undefined);
-  protected readonly reading = resource({ loader: ({ abortSignal }) => this.client.read({ weeks }, abortSignal) });
+  /** The first day asked for; this week's Monday without one. */
+  protected readonly from = signal<string | undefined>(undefined);
+  protected readonly reading = resource({
+    params: () => {
+      const from = this.from();
+      return from === undefined ? { weeks } : { from, weeks };
+    },
+    loader: ({ params, abortSignal }) => this.client.read(params, abortSignal),
+  });
   protected readonly board = computed<BoardAnswer | undefined>(() =>
     this.reading.hasValue() ? this.reading.value() : undefined,
   );
   protected readonly about = computed(() => {
     const board = this.board();
-    if (!board || board.jobs.length === 0) return '';
+    if (!board || board.jobs.length + board.unplanned.length === 0) return '';
     const count = (standing: string) =>
       this.formats.number(board.jobs.filter((job) => job.standing === standing).length, 0);
-    return $localize`${count('accepted')}:accepted: accepted, ${count('held')}:held: held`;
+    const planned = $localize`${count('accepted')}:accepted: accepted, ${count('held')}:held: held`;
+    if (board.unplanned.length === 0) return planned;
+    return $localize`${planned}:planned:, ${this.formats.number(board.unplanned.length, 0)}:unplanned: not planned yet`;
+  });
+  protected readonly days = computed(() => {
+    const board = this.board();
+    if (!board) return '';
+    const [first, last] = [board.firstDay, board.lastDay].map((day) => this.formats.day(day));
+    return $localize`${first}:first: to ${last}:last:`;
   });
   protected readonly frame = computed(() => {
     const board = this.board();
     return board && programmeFrame(board.firstDay, board.timeZone);
   });
   protected readonly now_minutes = computed(() => {
-    const frame = this.frame();
-    return frame && minutesOf(this.now().toISOString(), frame);
+    const [board, frame] = [this.board(), this.frame()];
+    if (!board || !frame) return undefined;
+    const now = minutesOf(this.now().toISOString(), frame);
+    return now >= 0 && now < endOf(board, frame) ? now : undefined;
   });
   protected readonly lots = computed(() => {
     const [board, frame] = [this.board(), this.frame()];
     if (!board || !frame) return [];
     const people = new Map(board.people.map(({ id, name }) => [id, name]));
-    return new BoardLots(this.formats, frame, people).of(board.jobs);
+    return new BoardLots(this.formats, frame, people).of(board);
   });
   protected readonly open = computed(() => {
     const [board, frame] = [this.board(), this.frame()];
@@ -77,6 +100,11 @@ export class BoardPage {
       .find(({ id }) => id === this.chosen()),
   );
   protected readonly clashes = computed(() => (this.board()?.clashes ?? []).map((clash) => this.clashText(clash)));
+
+  protected step(by: -1 | 1): void {
+    const board = this.board();
+    if (board) this.from.set(addDays(board.firstDay, by * step_days));
+  }
 
   private clashText({ name, startsAt, endsAt, estimateIds }: BoardAnswer['clashes'][number]): string {
     const jobs = (this.board()?.jobs ?? []).filter((job) => estimateIds.includes(job.estimateId));

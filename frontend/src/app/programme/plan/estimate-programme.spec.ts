@@ -6,6 +6,7 @@ import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import type { ProgrammeAnswer } from '#shared/programme/programme-schema';
 import { signIn, words } from '../../../test/sign-in';
 import { NOW } from '../../core/now';
+import { Notices } from '../../core/problems/notices';
 import { AnsweringForSpecs, type AskedParts, buttonIn, refusal, spoken } from '../answering-for-specs';
 import { StillObserver } from '../ribbon/ribbon-for-specs';
 import { EstimateProgramme } from './estimate-programme';
@@ -47,6 +48,7 @@ describe('EstimateProgramme', () => {
       keepProgramme: keep,
       keepPlan: ({ body, version }) =>
         programmeForSpecs({ plan: body as ProgrammeAnswer['plan'], version: (version ?? 0) + 1 }),
+      solveProgramme: () => ({ id: 's', state: 'done', plan: stands.plan }),
     });
     const now = { provide: NOW, useValue: () => new Date('2027-01-04T09:00:00Z') };
     const starter = { provide: PLANNING_STARTER, useValue: () => Promise.resolve(new PlanningHereForSpecs()) };
@@ -91,6 +93,34 @@ describe('EstimateProgramme', () => {
     await open({ read: { isCurrent: false } });
     expect(spoken(element())).toContain('Something this plan rests on has changed since it was kept.');
     expect(told.at(-1)).toBeUndefined();
+    expect(spoken(element().querySelector('.chips'))).not.toMatch(/offer|no plan is sooner/);
+  });
+
+  it('offers a day and says how good the plan is, as long as it stands', async () => {
+    await open();
+    expect(spoken(element().querySelector('.chips'))).toMatch(/offer Mon,? 11 Jan.*no plan is sooner/);
+  });
+
+  it('says that no better plan was found, where the new one is ready at the same time', async () => {
+    await open();
+    await press('Plan it');
+    expect(spoken(element())).toContain('No better plan was found: this one, not kept yet, is ready on');
+  });
+
+  it('asks the server to move nothing that need not where that is ticked, and says that the plan was kept', async () => {
+    await open();
+    (element().querySelector('[aria-label=Planning] input[type=checkbox]') as HTMLInputElement).click();
+    await settle();
+    await press('Plan it on the server');
+    expect(server.of('solveProgramme').map(({ body }) => (body as { keepsPlan: boolean }).keepsPlan)).toEqual([true]);
+    const said = TestBed.inject(Notices).current();
+    expect(said.map(({ text }) => text)).toEqual(['The plan of the server was kept.']);
+  });
+
+  it('says what cannot be in words of a plan, not of an issue', async () => {
+    const finding = { kind: 'refuse', code: 'programme-breaks-start', values: { task: 'Lay' } } as const;
+    await open({ read: { isCurrent: false, broken: [finding] } });
+    expect(spoken(element().querySelector('app-finding-list'))).toBe('Cannot be: Lay starts before it may.');
   });
 
   it('plans in a worker, proposes what came of it, and keeps that', async () => {

@@ -66,14 +66,16 @@ export class PlanWords {
     if (later > 0) return $localize`A new plan, not kept yet: ready on ${at}:moment:, ${time}:time: later than before.`;
     if (later < 0)
       return $localize`A new plan, not kept yet: ready on ${at}:moment:, ${time}:time: sooner than before.`;
+    if (before && answer?.isCurrent && proposal.inputs === null)
+      return $localize`No better plan was found: this one, not kept yet, is ready on ${at}:moment: too.`;
     return $localize`A new plan, not kept yet: ready on ${at}:moment:.`;
   });
-  /** What would help, each with when it would be ready and, for those who see cost, what it costs more. */
+  /** What was tried: where it helps when it would be ready and, for those who see cost, what it costs more. */
   readonly helps = computed(() =>
-    (this.planning.remedies() ?? []).flatMap(({ code, values, plan, cost_minor }) => {
+    (this.planning.remedies() ?? []).map(({ code, values, plan, cost_minor }) => {
       const at = this.moment(plan.finish_minutes);
       const [way, ready] = [this.words.say(code, this.named(values)), $localize`Ready on ${at ?? ''}:moment:.`];
-      return at ? [[way, ready, ...this.costOf(code, cost_minor)].join(' ')] : [];
+      return at ? [way, ready, ...this.costOf(code, cost_minor)].join(' ') : [way, $localize`This does not help.`].join(' ');
     }),
   );
 
@@ -110,14 +112,16 @@ export class PlanWords {
   private planChips(): string[] {
     const [answer, plan, frame] = [this.store.answer(), this.store.plan(), this.store.frame()];
     if (!answer || !frame || !plan || plan.finish_minutes === null) return [];
-    const offered = this.store.proposal() ? undefined : answer.dates?.offeredOn;
+    const isProposed = this.store.proposal() !== undefined;
+    const offered = isProposed || !answer.isCurrent ? undefined : answer.dates?.offeredOn;
     const starts = dayOfMinutes(plan.start_minutes, frame);
     return [
       ...(compareDays(starts, answer.inputs.day) === 0
         ? []
         : [$localize`starts ${this.formats.day(starts, 'full')}:day:`]),
       ...(offered ? [$localize`offer ${this.formats.day(offered, 'full')}:day:`] : []),
-      this.proof(plan),
+      // What was proven of a plan says nothing once what it was made from has changed.
+      ...(isProposed || answer.isCurrent ? [this.proof(plan)] : []),
     ];
   }
 

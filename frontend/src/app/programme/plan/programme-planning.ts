@@ -73,12 +73,13 @@ export class ProgrammePlanning {
     await this.told(async () => this.ways.set(await this.costs.of(answer, lotId, remedies)));
   }
 
-  async planOnServer(): Promise<void> {
+  /** Plans all of it on the server, which keeps what came of it. */
+  async planOnServer(movesLittle: boolean): Promise<void> {
     const estimateId = this.store.answer()?.estimateId;
     if (!estimateId) return;
     this.clear();
     await this.told(async () => {
-      let solution = await this.client.solve(estimateId, { seconds: serverSeconds, keepsPlan: false });
+      let solution = await this.client.solve(estimateId, { seconds: serverSeconds, keepsPlan: movesLittle });
       while (solution.state === 'waiting' || solution.state === 'working') {
         this.running.set(solution);
         await new Promise((resolve) => setTimeout(resolve, pollEvery_ms));
@@ -104,6 +105,7 @@ export class ProgrammePlanning {
     if (state === 'outdated') this.notices.complain($localize`The programme was changed meanwhile; plan it again.`);
     if (state === 'failed') this.notices.complain($localize`The server could not plan it. Plan it here instead.`);
     if (plan && plan.finish_minutes === null) this.failed.set(plan);
+    if (state === 'done' || state === 'stopped') this.notices.say($localize`The plan of the server was kept.`);
     this.store.reload();
   }
 

@@ -12,6 +12,7 @@ import { ProgrammeStore } from './programme-store';
 import { WhatIfPanel } from './what-if-panel';
 
 const answer = programmeForSpecs();
+const backward = programmeForSpecs({ inputs: { ...answer.inputs, direction: 'backward', day: '2027-01-20' } });
 
 describe('WhatIfPanel', () => {
   let fixture: ComponentFixture<WhatIfPanel>;
@@ -40,9 +41,9 @@ describe('WhatIfPanel', () => {
     };
   }
 
-  async function open() {
+  async function open(read = answer) {
     server = new AnsweringForSpecs({
-      readProgramme: () => answer,
+      readProgramme: () => read,
       readShop: () => ({ content: { people: [] } }),
       readWhatIf: whatIf,
     });
@@ -91,6 +92,18 @@ describe('WhatIfPanel', () => {
     expect(cold[2]).toBe('€1,120.00');
     expect(cold[3]).toMatch(/^\+\s?€120\.00$/);
     expect(cold[1]).toMatch(/days? later$/);
+  });
+
+  it('moves the day it is wanted by where it is planned backward, and calls it so', async () => {
+    await open(backward);
+    tick(1, false);
+    tick(0, true);
+    await settle();
+    expect(spoken(element().querySelector('.choice'))).toBe('it were wanted by');
+    buttonIn(element(), 'Compare').click();
+    await settle();
+    expect(server.of('readWhatIf').map(({ body }) => (body as WhatIf).day)).toEqual([null, '2027-01-27']);
+    expect(rows()[1][0]).toMatch(/^Wanted by Wed,? 27 Jan$/);
   });
 
   it('is never later with one more pair of hands', async () => {

@@ -43,6 +43,10 @@ export class WhatIfPanel {
 
   private readonly on = signal<readonly Way[]>(['hand']);
   protected readonly day_ = linkedSignal(() => addDays(this.store.answer()?.inputs.day ?? '2000-01-01', 7));
+  protected readonly isBackward = computed(() => this.store.answer()?.inputs.direction === 'backward');
+  protected readonly dayLabel = computed(() =>
+    this.isBackward() ? $localize`Another day it is wanted by` : $localize`Another start`,
+  );
   protected readonly grades = computed<readonly Named[]>(() => {
     const items = this.store.answer()?.items ?? [];
     return [...new Map(items.map(({ gradeId, grade }) => [gradeId, { id: gradeId, name: grade }])).values()].filter(
@@ -85,10 +89,7 @@ export class WhatIfPanel {
   private asked(way: Way): AskedWay {
     switch (way) {
       case 'day':
-        return {
-          name: $localize`Start ${this.formats.day(this.day_(), 'full')}:day:`,
-          whatIf: { ...asItIs, day: this.day_() },
-        };
+        return { name: this.dayName(this.formats.day(this.day_(), 'full')), whatIf: { ...asItIs, day: this.day_() } };
       case 'hand': {
         const grade = this.nameIn(this.grades(), this.gradeId());
         return { name: $localize`One more: ${grade}:grade:`, whatIf: { ...asItIs, furtherGradeIds: [this.gradeId()] } };
@@ -103,6 +104,10 @@ export class WhatIfPanel {
         return { name: this.nameIn(this.buildUps(), this.buildUpId()), whatIf: { ...asItIs, lots } };
       }
     }
+  }
+
+  private dayName(day: string): string {
+    return this.isBackward() ? $localize`Wanted by ${day}:day:` : $localize`Start ${day}:day:`;
   }
 
   private air(): Climate {

@@ -55,6 +55,33 @@ describe('DatedRibbon', () => {
     expect(tasks()[0].getAttribute('aria-pressed')).toBe('true');
   });
 
+  it('explains windows only where there are any', async () => {
+    await open([ribbonLot('legs', [ribbonTask('lay', 480)])]);
+    expect(element().querySelector('.legend')?.textContent).not.toContain('window open');
+    TestBed.resetTestingModule();
+    await open([ribbonLot('legs', [ribbonTask('lay', 480, { window: { start_minutes: 500, end_minutes: 900 } })])]);
+    expect(element().querySelector('.legend')?.textContent).toContain('window open');
+  });
+
+  it('cuts no name at the left: the week the edge stands in is named there, where there is room', async () => {
+    await open([ribbonLot('legs', [ribbonTask('lay', 480), ribbonTask('burnish', 480 + 20 * 1440)])]);
+    const scroller = element().querySelector('.scroll') as HTMLElement;
+    const heads = () => [...element().querySelectorAll<HTMLElement>('.day')];
+    const scroll = async (left: number) => {
+      scroller.scrollLeft = left;
+      scroller.dispatchEvent(new Event('scroll'));
+      await settle();
+      return heads().map((one) => `${one.textContent} ${one.matches('.edge') ? 'at the edge' : ''}`.trim());
+    };
+    // The sixth of May 2027 is a Thursday: the first Monday comes four days after the left edge.
+    expect((await scroll(0)).slice(0, 2)).toEqual(['3 May at the edge', '10 May']);
+    const [monday, next] = heads().slice(1);
+    const week_px = parseFloat(next.style.left) - parseFloat(monday.style.left);
+    const monday_px = (week_px * 4) / 7;
+    expect((await scroll(monday_px + 8)).slice(0, 2)).toEqual(['10 May at the edge', '17 May']);
+    expect((await scroll(monday_px + week_px - 8))[0]).toBe('17 May');
+  });
+
   it('draws a part of sixty lots of forty steps', async () => {
     await open(ribbonForSpecs(60, 40));
     expect(tasks().length).toBeGreaterThan(0);

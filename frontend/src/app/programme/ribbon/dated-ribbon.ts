@@ -24,9 +24,10 @@ import { smallScreen } from '../../ui/screen/small-screen';
 import { RibbonGround } from './ribbon-ground';
 import { RibbonLines } from './ribbon-lines';
 import type { RibbonLot, RibbonTask } from './ribbon-lot';
-import { RibbonDayNames } from './ribbon-day-names';
+import { RibbonHead } from './ribbon-head';
 import { RibbonPointer } from './ribbon-pointer';
 import { ribbonListening, type RibbonListener } from './ribbon-listening';
+import { firstNotDone } from './first-not-done';
 import { ribbonRange } from './ribbon-range';
 import { RibbonRow } from './ribbon-row';
 import { pixelOf, zoomByWheel } from './ribbon-scale';
@@ -52,7 +53,6 @@ export class DatedRibbon implements RibbonListener {
   private readonly isSmall = smallScreen();
   private readonly scroller = viewChild.required<ElementRef<HTMLElement>>('scroller');
   private readonly lines = new RibbonLines();
-  private readonly dayNames = new RibbonDayNames(this.formats);
 
   readonly label = input.required<string>();
   readonly lots = input.required<readonly RibbonLot[]>();
@@ -82,8 +82,9 @@ export class DatedRibbon implements RibbonListener {
     this.lines.in(this.lots(), { scale: this.view.laidScale(), part: this.view.laidPart(), row_px: this.row_px }),
   );
   protected readonly ground = new RibbonGround(this);
-  protected readonly days = computed(() =>
-    this.ground.days().map((mark) => ({ x: mark.x, text: this.dayNames.of(mark) })),
+  protected readonly head = new RibbonHead(this.ground, this.view, this.formats);
+  protected readonly hasWindows = computed(() =>
+    this.lots().some(({ tasks }) => tasks.some(({ window }) => window !== null)),
   );
   protected readonly stretched = computed(() => (this.view.stretch() === 1 ? null : `scale(${this.view.stretch()} 1)`));
   protected readonly pointer = new RibbonPointer(this.rows, this.view.stretch);
@@ -231,10 +232,9 @@ export class DatedRibbon implements RibbonListener {
     this.resting = setTimeout(() => this.view.settle(), rest_ms);
   }
 
-  /** Begins at now, where that lies within, else at the first task. */
+  /** Begins at the first work that is not done. */
   private begin(first_minutes: number): void {
-    const now = untracked(this.now_minutes);
-    const from = now !== undefined && now > first_minutes ? now : first_minutes + day_minutes / 4;
+    const from = firstNotDone(untracked(this.lots), untracked(this.now_minutes)) ?? first_minutes + day_minutes / 4;
     afterNextRender(() => this.scrollTo(this.view.leftFor(from)), { injector: this.injector });
   }
 

@@ -33,4 +33,15 @@ describe('FindingList', () => {
     element.querySelector('button')?.click();
     expect(chosen.map(({ about }) => about)).toEqual(['zone-1']);
   });
+
+  it('calls a refusal what it is called where it stands', async () => {
+    TestBed.configureTestingModule({ providers: [words] });
+    signIn();
+    const fixture = TestBed.createComponent(FindingList, {
+      bindings: [inputBinding('findings', () => findings.slice(2)), inputBinding('stops', () => 'Cannot be')],
+    });
+    await fixture.whenStable();
+    const [line] = (fixture.nativeElement as HTMLElement).querySelectorAll('li');
+    expect(line.textContent?.trim().replace(/\s+/g, ' ')).toBe('Cannot be: Please fill this in.');
+  });
 });

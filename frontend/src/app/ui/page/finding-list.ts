@@ -2,8 +2,7 @@ import { ChangeDetectionStrategy, Component, booleanAttribute, computed, inject,
 import type { Finding, FindingKind } from '#shared/words/finding';
 import { Words } from '../../core/formats/words';
 
-const kindNames: Readonly<Record<FindingKind, string>> = {
-  refuse: $localize`Stops an issue`,
+const kindNames: Readonly<Record<Exclude<FindingKind, 'refuse'>, string>> = {
   missing: $localize`Missing from the rate card`,
   warn: $localize`Worth a look`,
   caution: $localize`Caution`,
@@ -41,6 +40,8 @@ export class FindingList {
   readonly findings = input.required<readonly Finding[]>();
   /** A finding that speaks of a member, zone or ornament can be chosen, to go there. */
   readonly linked = input(false, { transform: booleanAttribute });
+  /** What a refusal is called here. */
+  readonly stops = input($localize`Stops an issue`);
   /** Where it holds, in a smaller line beneath. */
   readonly minor = input<(finding: Finding) => string>();
   readonly chosen = output<Finding>();
@@ -50,7 +51,7 @@ export class FindingList {
       .sort((one, other) => order.indexOf(one.kind) - order.indexOf(other.kind))
       .map((finding) => ({
         finding,
-        kind: kindNames[finding.kind],
+        kind: finding.kind === 'refuse' ? this.stops() : kindNames[finding.kind],
         text: this.words.say(finding.code, finding.values),
         minor: this.minor()?.(finding),
       })),
