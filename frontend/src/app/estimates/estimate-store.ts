@@ -62,8 +62,6 @@ export class EstimateStore {
   readonly card = computed(() => (this.cardRead.hasValue() ? this.cardRead.value() : undefined));
   /** The newest first. */
   readonly issues = computed(() => (this.issuesRead.hasValue() ? this.issuesRead.value() : []));
-  /** The issue its client accepted, if there is one. */
-  readonly accepted = computed(() => this.issues().find(({ state }) => state === 'accepted'));
 
   readonly draft = this.rows.draft;
   readonly pieces = computed<readonly Piece[]>(() => this.draft()?.pieces ?? []);

@@ -64,6 +64,9 @@ export class IssueBox {
   protected readonly isReady = computed(
     () => this.look.status() === 'resolved' && this.stopping().length === 0 && !this.issuing.isCardOld(),
   );
+  protected readonly acceptedLetter = computed(
+    () => this.store.issues().find(({ state }) => state === 'accepted')?.letter,
+  );
   protected readonly jobRoute = computed(() => ['/jobs', this.store.ids()?.jobId ?? '']);
   protected readonly gross = computed(() => this.formats.money(this.store.priced()?.price.gross_minor ?? 0));
 

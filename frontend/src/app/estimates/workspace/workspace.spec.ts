@@ -79,6 +79,12 @@ describe('Workspace', () => {
     expect(text('app-tally-bar .minor')[0]).toBe('3 members');
   });
 
+  it('works toward nothing once an issue is accepted', async () => {
+    server.issues = () => Promise.resolve([{ ...issueA, state: 'accepted' }]);
+    await open();
+    expect(text('.chip')).toEqual(['issue A accepted']);
+  });
+
   it('shows the bench its places, without price or issue', async () => {
     server.isPriced = false;
     await open(['bench']);

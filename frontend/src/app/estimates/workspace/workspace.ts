@@ -67,7 +67,9 @@ export class Workspace implements OnInit {
   protected readonly nextLetter = computed(() => issueLetter(this.store.issues().length + 1));
 
   /** What is agreed is not worked toward any more. */
-  protected readonly acceptedLetter = computed(() => this.store.accepted()?.letter);
+  protected readonly acceptedLetter = computed(
+    () => this.store.issues().find(({ state }) => state === 'accepted')?.letter,
+  );
 
   constructor() {
     effect(() => this.title?.name(this.heading() || undefined));
