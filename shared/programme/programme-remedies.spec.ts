@@ -1,7 +1,7 @@
 import { inPortions } from '#shared/programme/in-portions';
 import { programme } from '#shared/programme/programme';
 import { programmeRemedies } from '#shared/programme/programme-remedies';
-import { lagForSpecs, requestForSpecs, taskForSpecs } from '#shared/programme/request-for-specs';
+import { lagForSpecs, personForSpecs, requestForSpecs, taskForSpecs } from '#shared/programme/request-for-specs';
 
 /** A three-hour size whose laying has to end four hours after the tack, and four and a half hours of laying. */
 const request = requestForSpecs({
@@ -51,6 +51,16 @@ describe('What helps a size that finds no time', () => {
     expect(ends).toEqual([...ends].sort((a, b) => a - b));
   });
 
+  it('in portions is tried in so many as it takes', () => {
+    // Eighteen hours of laying into a window of four: in four it is four and a half hours each, in five a little more than three and a half.
+    const lay = taskForSpecs('lay', { handsOn_minutes: 18 * 60, isBreakable: false });
+    const large = { ...request, tasks: [request.tasks[0], lay, request.tasks[2]] };
+    const helping = programmeRemedies(large, 'size', { otherSizes: [] }).filter(
+      ({ plan: { finish_minutes } }) => finish_minutes !== null,
+    );
+    expect(helping.map(({ code, values }) => [code, values['portions']])).toEqual([['programme-remedy-portions', 5]]);
+  });
+
   it('in portions keeps all the work', () => {
     const halves = inPortions(request, 'size', 2);
     expect(halves.tasks.map(({ id, handsOn_minutes }) => [id, handsOn_minutes])).toEqual([
@@ -67,6 +77,31 @@ describe('What helps a size that finds no time', () => {
       'size#2 lay#2',
       'lay#1 tone',
       'lay#2 tone',
+    ]);
+  });
+});
+
+describe('What helps where all of it comes too late', () => {
+  const late = requestForSpecs({
+    tasks: ['one', 'two'].map((id) => taskForSpecs(id, { handsOn_minutes: 300, mostPeople: 1 })),
+    people: [personForSpecs('gina', 'gilder')],
+  });
+  // Ten hours of work for one person, wanted in a day of eight.
+  const search = { backwardFrom_minutes: 17 * 60, limit: { nodes: 5 } };
+
+  it('is more hands or a longer day, each tried by the day wanted', () => {
+    expect(programme(late, search).findings).toMatchObject([{ code: 'programme-too-late' }]);
+    const remedies = programmeRemedies(late, null, { otherSizes: [], search });
+    // A day longer at its end is none before five, so only a second gilder helps: five hours each.
+    expect(remedies.map(({ code, plan }) => [code, plan.finish_minutes])).toEqual([
+      ['programme-remedy-further-hands', 17 * 60],
+      ['programme-remedy-longer-day', null],
+    ]);
+    const later = { ...search, backwardFrom_minutes: 24 * 60 };
+    const evening = programmeRemedies(late, null, { otherSizes: [], search: later });
+    expect(evening.map(({ code, values }) => [code, values['by_minutes'] ?? null])).toContainEqual([
+      'programme-remedy-longer-day',
+      120,
     ]);
   });
 });

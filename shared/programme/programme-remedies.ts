@@ -59,7 +59,7 @@ function withOtherSize(request: ProgrammeRequest, { name, lags }: OtherSize): Tr
 
 /** By how much a day is made longer, one after another, and into how many portions work is parted. */
 const longer_minutes = [60, 120, 180];
-const portionCounts = [2, 3, 4];
+const portionCounts = [2, 3, 4, 5, 6, 7, 8, 10, 12, 16];
 
 function changes(request: ProgrammeRequest, taskId: string, { otherSizes }: RemedyChoices): (() => Tried)[][] {
   const tied = tasksTiedTo(request, taskId);
@@ -80,13 +80,23 @@ function changes(request: ProgrammeRequest, taskId: string, { otherSizes }: Reme
   ];
 }
 
+/** What may be changed where all of it comes too late: hands of every grade there is work for, and the length of the day. */
+function changesOfAll(request: ProgrammeRequest): (() => Tried)[][] {
+  const hands = request.tasks.filter(({ crew, happened }) => crew > 0 && !happened).map(({ gradeId }) => gradeId);
+  return [
+    longer_minutes.map((by_minutes) => () => withLongerDay(request, by_minutes)),
+    ...[...new Set(hands)].map((gradeId) => [() => withFurtherHands(request, gradeId)]),
+  ];
+}
+
 /**
  * What would help a task that finds no time, each tried by planning anew: another size, smaller lots, a longer day (the least of each that helps, else the most),
- * further hands; soonest finish first, what does not help last. Costs are reckoned elsewhere. Minutes.
+ * further hands; of all of it (null) hands and days alone; soonest finish first, what does not help last. Costs are reckoned elsewhere. Minutes.
  */
-export function programmeRemedies(request: ProgrammeRequest, taskId: string, choices: RemedyChoices): Remedy[] {
+export function programmeRemedies(request: ProgrammeRequest, taskId: string | null, choices: RemedyChoices): Remedy[] {
   const search = choices.search ?? { limit: { nodes: 0 } };
-  const remedies = changes(request, taskId, choices).flatMap((steps) => {
+  const tries = taskId === null ? changesOfAll(request) : changes(request, taskId, choices);
+  const remedies = tries.flatMap((steps) => {
     let last: Remedy | null = null;
     for (const step of steps) {
       const tried = step();

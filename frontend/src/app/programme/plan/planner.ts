@@ -37,7 +37,16 @@ export class Planner {
     taskId: string,
     otherSizes: readonly OtherSize[],
   ): Promise<readonly Remedy[]> {
-    const answer = await this.ask({ request, search: {}, seconds: 0, helpsTask: taskId, otherSizes });
+    return this.helped({ request, search: {}, seconds: 0, helpsTask: taskId, otherSizes });
+  }
+
+  /** What would help where all of it comes too late for the day it is looked for by. */
+  async remediesOfAll(request: ProgrammeRequest, search: PagePlanning['search']): Promise<readonly Remedy[]> {
+    return this.helped({ request, search, seconds: 0, helpsTask: null });
+  }
+
+  private async helped(question: PagePlanning): Promise<readonly Remedy[]> {
+    const answer = await this.ask(question);
     return 'remedies' in answer ? answer.remedies : [];
   }
 

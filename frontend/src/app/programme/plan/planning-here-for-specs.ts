@@ -1,5 +1,6 @@
 import type { PagePlanning } from '#shared/programme/page-planning';
 import { programme } from '#shared/programme/programme';
+import { programmeRemedies } from '#shared/programme/programme-remedies';
 
 /** A worker that plans where it stands. */
 export class PlanningHereForSpecs extends EventTarget {
@@ -7,8 +8,13 @@ export class PlanningHereForSpecs extends EventTarget {
     return;
   }
 
-  postMessage({ request, search }: PagePlanning): void {
-    const plan = programme(request, search);
-    queueMicrotask(() => this.dispatchEvent(new MessageEvent('message', { data: { plan } })));
+  postMessage({ request, search, helpsTask, otherSizes = [] }: PagePlanning): void {
+    const data =
+      helpsTask === undefined
+        ? { plan: programme(request, search) }
+        : {
+            remedies: programmeRemedies(request, helpsTask, { otherSizes, search: { ...search, limit: { nodes: 0 } } }),
+          };
+    queueMicrotask(() => this.dispatchEvent(new MessageEvent('message', { data })));
   }
 }

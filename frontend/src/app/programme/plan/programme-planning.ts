@@ -63,13 +63,18 @@ export class ProgrammePlanning {
     return found ? this.take(found, inputs) : false;
   }
 
-  /** Tries what would help the task that finds no time, other sizes of its lot among it, and reckons what that costs. */
+  /** Tries what would help the task that finds no time, other sizes of its lot among it, or all of it where it comes too late, and reckons what that costs. */
   async help(): Promise<void> {
     const [answer, about] = [this.store.answer(), this.findings().find(({ about }) => about)?.about];
-    if (!answer || !about) return;
+    if (!answer) return;
     const lotId = answer.items.find(({ taskId }) => taskId === about)?.lotId ?? '';
     const sizes = answer.otherSizes.filter((size) => size.lotId === lotId);
-    const remedies = await this.planner.remedies(answer.request, about, sizes);
+    const remedies = await this.unlessStopped(() =>
+      about === undefined
+        ? this.planner.remediesOfAll(answer.request, this.store.search(false))
+        : this.planner.remedies(answer.request, about, sizes),
+    );
+    if (!remedies) return;
     await this.told(async () => this.ways.set(await this.costs.of(answer, lotId, remedies)));
   }
 
@@ -121,6 +126,10 @@ export class ProgrammePlanning {
 
   private async worked(work: () => Promise<Programme>): Promise<Programme | undefined> {
     this.clear();
+    return this.unlessStopped(work);
+  }
+
+  private async unlessStopped<T>(work: () => Promise<T>): Promise<T | undefined> {
     try {
       return await work();
     } catch (error) {

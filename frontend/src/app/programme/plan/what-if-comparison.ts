@@ -1,14 +1,16 @@
 import { Injectable, inject, signal } from '@angular/core';
 import { addDays } from '#shared/calendar/add-days';
 import { costOfFurtherHands } from '#shared/programme/cost-of-further-hands';
-import { instantOf, minutesOfDay, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import { instantOf, minutesBetween, minutesOfDay, type ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import type { Programme } from '#shared/programme/programme-plan';
+import { shiftedPlan } from '#shared/programme/shifted-plan';
 import type { WhatIf } from '#shared/programme/what-if';
 import type { WhatIfAnswer } from '#shared/programme/what-if-schema';
 import type { Finding } from '#shared/words/finding';
 import { Planner, PlanningStopped } from './planner';
 import { ProgrammeClient } from './programme-client';
+import { ProgrammeStore } from './programme-store';
 
 /** One way of doing it, by its name, against the programme as it stands. */
 export interface AskedWay {
@@ -49,16 +51,25 @@ function compared(name: string, answer: WhatIfAnswer, plan: Programme): Compared
   };
 }
 
+interface FramedPlan {
+  readonly plan: Programme;
+  readonly frame: ProgrammeFrame;
+}
+
+const isSooner = (one: Programme, other: Programme): boolean =>
+  (one.finish_minutes ?? Infinity) < (other.finish_minutes ?? Infinity);
+
 /** Plans ways of doing it one after another, so that they stand side by side by finish and cost; nothing is kept. */
 @Injectable()
 export class WhatIfComparison {
   private readonly client = inject(ProgrammeClient);
   private readonly planner = inject(Planner);
+  private readonly store = inject(ProgrammeStore);
   private readonly done = signal<readonly ComparedWay[]>([]);
   private readonly underWay = signal<string | undefined>(undefined);
   private isStopped = false;
   /** The plan of the first way: where it keeps the rules of another too, that one never ends later. */
-  private first: Programme | undefined;
+  private first: FramedPlan | undefined;
 
   readonly ways = this.done.asReadonly();
   /** The name of the way that is being planned. */
@@ -90,10 +101,18 @@ export class WhatIfComparison {
   private async worked(estimateId: string, { direction, day }: ProgrammeInputs, way: AskedWay): Promise<ComparedWay> {
     const answer = await this.client.whatIf(estimateId, way.whatIf);
     const until = minutesOfDay(addDays(way.whatIf.day ?? day, 1), frameOfWhatIf(answer));
-    const incumbent = this.first;
+    const known = this.first ?? this.kept();
+    const incumbent = known && shiftedPlan(known.plan, minutesBetween(known.frame, frameOfWhatIf(answer)));
     const search = direction === 'backward' ? { backwardFrom_minutes: until } : incumbent ? { incumbent } : {};
-    const plan = await this.planner.plan({ request: answer.request, search, seconds });
-    this.first ??= plan;
+    const found = await this.planner.plan({ request: answer.request, search, seconds });
+    const plan = !this.first && incumbent && isSooner(incumbent, found) ? incumbent : found;
+    this.first ??= { plan, frame: frameOfWhatIf(answer) };
     return compared(way.name, answer, plan);
+  }
+
+  /** The plan that is kept, as long as it holds: as it is, it never ends later. */
+  private kept(): FramedPlan | undefined {
+    const [shown, frame] = [this.store.answer(), this.store.frame()];
+    return shown?.isCurrent && shown.plan && frame ? { plan: shown.plan, frame } : undefined;
   }
 }

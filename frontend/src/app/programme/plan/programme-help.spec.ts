@@ -1,0 +1,79 @@
+import { TestBed } from '@angular/core/testing';
+import { signIn, words } from '../../../test/sign-in';
+import { AnsweringForSpecs } from '../answering-for-specs';
+import { Planner } from './planner';
+import { PlanningHereForSpecs } from './planning-here-for-specs';
+import { PLANNING_STARTER } from './planning-starter';
+import { programmeForSpecs } from './programme-for-specs';
+import { ProgrammePlanning } from './programme-planning';
+import { ProgrammeStore } from './programme-store';
+import { asItIs, WhatIfComparison } from './what-if-comparison';
+
+const stands = programmeForSpecs();
+
+async function opened(read = stands, worker: () => EventTarget = () => new PlanningHereForSpecs()) {
+  const { firstDay, startsAt, timeZone, request, items } = read;
+  const server = new AnsweringForSpecs({
+    readProgramme: () => read,
+    readShop: () => ({ content: { people: [] } }),
+    readWhatIf: () => ({
+      ...{ firstDay, startsAt, timeZone, items, findings: [], rates: [], setUp_hours: 0, digits: 2 },
+      // Asked on the third day, so that all of it would begin only then.
+      request: { ...request, start_minutes: 3 * 1440 },
+      ...{ cost_minor: 100_000, costDifference_minor: 0, gross_minor: 150_000, grossDifference_minor: 0 },
+    }),
+  });
+  const starter = { provide: PLANNING_STARTER, useValue: () => Promise.resolve(worker()) };
+  const own = [ProgrammeStore, Planner, ProgrammePlanning, WhatIfComparison];
+  TestBed.configureTestingModule({ providers: [words, server.provider, starter, ...own] });
+  signIn(['estimator']);
+  TestBed.inject(ProgrammeStore).open(read.estimateId, 0);
+  for (let turn = 0; turn < 4; turn += 1) {
+    TestBed.tick();
+    await new Promise((resolve) => setTimeout(resolve));
+  }
+}
+
+/** Wanted on the day it begins, which is too soon. */
+const tooSoon = programmeForSpecs({ inputs: { ...stands.inputs, direction: 'backward', day: '2027-01-04' } });
+
+describe('As it is', () => {
+  it('never ends later than the plan that is kept', async () => {
+    await opened();
+    const comparison = TestBed.inject(WhatIfComparison);
+    await comparison.compare(stands.estimateId, stands.inputs, [{ name: 'As it is', whatIf: asItIs }]);
+    const kept = Date.parse(stands.startsAt) + (stands.plan?.finish_minutes ?? 0) * 60_000;
+    expect(comparison.ways().map(({ readyAt }) => readyAt)).toEqual([new Date(kept).toISOString()]);
+  });
+});
+
+describe('Help', () => {
+  it('tries hands and days where all of it comes too late, and tells what does not help too', async () => {
+    await opened(tooSoon);
+    const planning = TestBed.inject(ProgrammePlanning);
+    await planning.plan(false);
+    expect(planning.findings().map(({ code }) => code)).toEqual(['programme-too-late']);
+    await planning.help();
+    expect(
+      planning
+        .remedies()
+        ?.map(({ code }) => code)
+        .sort(),
+    ).toEqual(['programme-remedy-further-hands', 'programme-remedy-further-hands', 'programme-remedy-longer-day']);
+  });
+
+  it('can be stopped, and why there is no plan stays to be read', async () => {
+    let isSilent = false;
+    const silent = () => Object.assign(new EventTarget(), { terminate: () => undefined, postMessage: () => undefined });
+    await opened(tooSoon, () => (isSilent ? silent() : new PlanningHereForSpecs()));
+    const planning = TestBed.inject(ProgrammePlanning);
+    await planning.plan(false);
+    isSilent = true;
+    const helping = planning.help();
+    await new Promise((resolve) => setTimeout(resolve));
+    await planning.stop();
+    await helping;
+    expect(planning.remedies()).toBeUndefined();
+    expect(planning.findings()).toHaveLength(1);
+  });
+});
