@@ -16,12 +16,16 @@ import {
   removeInvoice,
   sendInvoice,
 } from '#shared/invoices/invoices-endpoints';
+import { acceptIssue } from '#shared/client-page/client-issues-endpoints';
+import { changeEstimate } from '#shared/estimates/estimates-endpoints';
 import { startInvoiceSettings } from '#shared/invoices/invoice-settings';
 import type { StageClaim } from '#shared/invoices/stage-claim';
+import { stagePayments } from '#shared/money/stage-payments';
 import { textAt, ublFaults, ublRoot } from '../reference/ubl-check';
 import { keepLetterTemplate } from '#shared/agreements/letters-endpoints';
-import { ledgerFaults } from './ledger';
-import { acceptedIssue } from './sample-client-visit';
+import { contractFaults, ledgerFaults } from './ledger';
+import { acceptanceOf, acceptedIssue, clientOf, issueOf } from './sample-client-visit';
+import { sampleEstimate } from './sample-estimate';
 import {
   creditDraft,
   issued,
@@ -274,6 +278,59 @@ describe('invoices of a contract', () => {
     const done = await account(jobId);
     expect(done.parts[0]).toMatchObject({ isComplete: true, left_minor: 0 });
     expect(done.invoiced_minor - done.credited_minor).toBe(done.gross_minor);
+    expect(await contractFaults(api.app, api.platform.database)).toEqual([]);
+  });
+
+  it('that were a cent off would be seen by the law of the books', async () => {
+    const { jobId, issueId } = await acceptedIssue(api.ours, api);
+    const { database } = api.platform;
+    const { account: read } = api.app.invoices.stages;
+    const planted = { ...(await account(jobId)) };
+    const [part] = planted.parts;
+    api.app.invoices.stages.account = async (workshopId, asked) =>
+      asked === jobId
+        ? { ...planted, parts: [{ ...part, left_minor: part.left_minor - 1, next: [] }] }
+        : read.call(api.app.invoices.stages, workshopId, asked);
+    try {
+      const faults = await contractFaults(api.app, database);
+      expect(faults).toEqual([
+        `of ${issueId} ${part.gross_minor} is left, not ${part.gross_minor - 1}`,
+        `all of ${issueId} is invoiced, but for ${part.gross_minor}`,
+        `${issueId} is not called complete`,
+      ]);
+    } finally {
+      api.app.invoices.stages.account = read;
+    }
+    expect(await contractFaults(api.app, database)).toEqual([]);
+  });
+
+  it('fall due as the review promised, and bear the reason why nothing is charged that was frozen with the issue', async () => {
+    const sample = await sampleEstimate(api.ours);
+    const { estimateId, jobId } = sample;
+    const { settings } = (await api.app.estimates.drafts.whole(api.ours.id, estimateId)).estimate;
+    const stages = { ...settings.stages, deposit_percent: 30, retention_percent: 5 };
+    const content = { ...settings, stages, taxCategoryId: 'exempt' };
+    const changes = [{ kind: 'settings', id: estimateId, version: 1, content }];
+    expect(
+      (await owner().visitor.call(changeEstimate, { params: { estimateId }, body: { changes } })).status,
+    ).toBeLessThan(300);
+    const issueId = await issueOf(api.ours, api, estimateId);
+    const visitor = await clientOf(api.ours, api, issueId);
+    const acceptance = await acceptanceOf(visitor, issueId);
+    expect((await visitor.call(acceptIssue, acceptance)).status).toBeLessThan(300);
+    const { gross_minor } = acceptance.body as { gross_minor: number };
+    const promised = stagePayments(gross_minor, {
+      ...{ deposit_percent: 30, retention_percent: 5 },
+      stages_percent: stages.parts.length > 0 ? stages.parts.map(({ percent }) => percent) : [100],
+    });
+    const offered = (await account(jobId)).parts[0].next;
+    const due = [];
+    for (const { claim } of offered) {
+      const invoice = await stageInvoice(api.ours, { jobId, issueId }, claim);
+      expect(invoice.content.exemptions).toEqual([{ code: 'E', reasonCode: '', reason: 'Exempt from VAT' }]);
+      due.push(invoice.due_minor);
+    }
+    expect(due).toEqual([promised.deposit_minor, ...promised.stages.map(({ paid_minor }) => paid_minor)]);
   });
 
   it('are claimed once by fifty who do so at the same moment', async () => {

@@ -15,7 +15,7 @@ import type { Platform } from '../../backend/src/platform/platform';
 import { freshDatabase } from '../database/fresh-database';
 import { canary } from './canary';
 import { faultsOfLog } from './faults-of-log';
-import { ledgerFaults } from './ledger';
+import { contractFaults, ledgerFaults } from './ledger';
 import { MovingClock } from './moving-clock';
 import { addPerson, openWorkshop, type Door, type TestPerson, type TestWorkshop } from './test-workshop';
 import { Visitor } from './visitor';
@@ -87,9 +87,12 @@ async function openParts(environment: Environment) {
   const stop = async () => {
     await standIn.stop();
     await catcher.stop();
-    const books = await ledgerFaults(platform.database).finally(() => platform.database.close());
+    const { database } = platform;
+    const books = await Promise.all([ledgerFaults(database), contractFaults(app, database)]).finally(() =>
+      database.close(),
+    );
     await rm(folder, { recursive: true, force: true });
-    const faults = [...books, ...faultsOfLog(logLines)];
+    const faults = [...books.flat(), ...faultsOfLog(logLines)];
     if (faults.length > 0) throw new Error(`The books or the log of this run: ${faults.slice(0, 5).join('; ')}`);
   };
   return { platform, clock, logLines, catcher, standIn, app, stop };

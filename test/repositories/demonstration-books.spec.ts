@@ -1,4 +1,4 @@
-import { ledgerFaults } from '../api/ledger';
+import { contractFaults, ledgerFaults } from '../api/ledger';
 import { ublFaults } from '../reference/ubl-check';
 import { seededDemonstration, type SeededDemonstration } from './seeded-demonstration';
 
@@ -13,6 +13,7 @@ const invoicesOf = async () => (await seeded.app.invoices.reading.page(seeded.wo
 describe('The books of the demonstration', () => {
   it('agree to the cent', async () => {
     expect(await ledgerFaults(seeded.platform.database)).toEqual([]);
+    expect(await contractFaults(seeded.app, seeded.platform.database)).toEqual([]);
   });
 
   it('hold a repair that is overdue, a deposit that was paid and a stage that is open', async () => {
