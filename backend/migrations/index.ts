@@ -13,6 +13,7 @@ import { programme } from './0045-programme';
 import { invoices } from './0050-invoices';
 import { takenBack } from './0051-taken-back';
 import { writtenOffBecause } from './0052-written-off-because';
+import { lettersAboutInvoices } from './0053-letters-about-invoices';
 
 /** Every step of the schema, in the order in which they are taken. A step that was released is never changed. */
 export const migrations: readonly Migration[] = [
@@ -30,4 +31,5 @@ export const migrations: readonly Migration[] = [
   invoices,
   takenBack,
   writtenOffBecause,
+  lettersAboutInvoices,
 ];

@@ -1,25 +1,14 @@
 import * as z from 'zod';
 import { endpoint } from '#shared/actor/endpoint';
+import { clientInvoiceSummarySchema } from '#shared/client-page/client-overview-schema';
 import { invoicePapers } from '#shared/invoices/invoice-schema';
-import { invoiceKinds } from '#shared/invoices/invoice';
 import { checkoutSchema } from '#shared/invoices/payment-schema';
 import { identifier } from '#shared/problems/entry-schema';
 
 const oneInvoice = z.strictObject({ invoiceId: identifier });
 
-/** An invoice or credit note as its client sees it in a list. */
-export const clientInvoiceSchema = z.strictObject({
-  id: z.uuid(),
-  kind: z.enum(invoiceKinds),
-  jobId: z.uuid().nullable(),
-  number: z.string(),
-  issuedOn: z.string(),
-  /** Null for a credit note. */
-  dueOn: z.string().nullable(),
-  due_minor: z.int(),
-  open_minor: z.int(),
-  currency: z.string(),
-  isOverdue: z.boolean(),
+/** An invoice or credit note as its client sees it, with its papers and whether it may be paid by card. */
+export const clientInvoiceSchema = clientInvoiceSummarySchema.extend({
   papers: z.array(z.enum(invoicePapers)),
   mayPayByCard: z.boolean(),
 });

@@ -1,6 +1,7 @@
 import * as z from 'zod';
 import { issueStandings } from '#shared/agreements/issue-standing';
 import { clientLetterheadSchema } from '#shared/client-page/client-letterhead-schema';
+import { invoiceKinds } from '#shared/invoices/invoice';
 
 /** An issue in a list. */
 export const clientIssueSummarySchema = z.strictObject({
@@ -16,16 +17,21 @@ export const clientIssueSummarySchema = z.strictObject({
   currency: z.string(),
 });
 
-/** An invoice in a list, with what is still owed on it. */
+/** An invoice or credit note in a list, with what is still owed on it. */
 export const clientInvoiceSummarySchema = z.strictObject({
   id: z.uuid(),
+  kind: z.enum(invoiceKinds),
   jobId: z.uuid().nullable(),
   number: z.string(),
   issuedOn: z.string(),
-  dueOn: z.string(),
+  /** Null for a credit note. */
+  dueOn: z.string().nullable(),
   due_minor: z.int(),
   open_minor: z.int(),
+  /** What of it was credited. */
+  credited_minor: z.int(),
   currency: z.string(),
+  isOverdue: z.boolean(),
 });
 export type ClientInvoiceSummary = z.infer<typeof clientInvoiceSummarySchema>;
 

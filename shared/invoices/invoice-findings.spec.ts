@@ -43,6 +43,7 @@ const hand = (more: Partial<InvoiceContent> = {}, facts: Partial<InvoiceInHand> 
     account: { name: 'Carvers', iban: 'AT611904300234573201', bic: '' },
     issuedOn: '2026-12-01',
     dueOn: '2026-12-15',
+    mailsTo: 'office@museum.example',
     ...facts,
   };
 };
@@ -53,6 +54,10 @@ const anonymous = { ...content({}).buyer, vatId: '' };
 
 it('finds nothing to say of an ordinary invoice', () => {
   expect(codes(hand())).toEqual([]);
+});
+
+it('warns where no address is known that anything about it could be mailed to', () => {
+  expect(codes(hand({}, { mailsTo: '' }))).toEqual(['warn invoice-buyer-email']);
 });
 
 it('warns of letters the paper cannot print, each by the text it stands in', () => {

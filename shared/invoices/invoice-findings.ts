@@ -7,11 +7,12 @@ import type { Finding } from '#shared/words/finding';
 import { letterFindings } from '#shared/words/letter-findings';
 
 /** EN 16931: BR-16 (lines), BR-07 and BR-11 (buyer), BR-CO-26 (seller). */
-function partyFindings({ content, seller }: InvoiceInHand): Finding[] {
+function partyFindings({ content, seller, mailsTo }: InvoiceInHand): Finding[] {
   const numbers = [seller.vatId, seller.taxNumber, seller.companyNumber];
   return [
     ...when(content.lines.length === 0, ['refuse', 'invoice-no-lines']),
     ...when(content.buyer.address.trim() === '', ['warn', 'invoice-buyer-address']),
+    ...when(mailsTo === '', ['warn', 'invoice-buyer-email'], { client: content.buyer.name }),
     ...when(
       numbers.every((number) => number === ''),
       ['refuse', 'invoice-seller-number'],

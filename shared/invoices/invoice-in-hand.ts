@@ -15,6 +15,8 @@ export interface InvoiceInHand {
   readonly account: PayeeAccount | null;
   readonly issuedOn: string;
   readonly dueOn: string | null;
+  /** Where letters about it would go; empty where no address is known. */
+  readonly mailsTo: string;
 }
 
 /** A finding where something is so, none where it is not. */

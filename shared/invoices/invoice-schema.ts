@@ -91,6 +91,10 @@ const contentShape = {
 
 export const invoiceContentSchema = z.strictObject(contentShape) satisfies z.ZodType<InvoiceContent>;
 
+/** Letters about an invoice: the paper itself, a reminder, thanks for a payment by card. */
+export const invoiceLetterKinds = ['paper', 'reminder', 'receipt'] as const;
+export type InvoiceLetterKind = (typeof invoiceLetterKinds)[number];
+
 export const invoiceStates = ['draft', 'issued'] as const;
 export type InvoiceState = (typeof invoiceStates)[number];
 
@@ -162,6 +166,19 @@ export const invoiceSchema = invoiceSummarySchema.extend({
       reason: z.string(),
       writtenOn: z.string(),
       byName: z.string(),
+    }),
+  ),
+  /** Where letters about it go now: the address on it, else the one kept of the client; empty where neither is known. */
+  mailsTo: z.string(),
+  /** What was mailed about it, the oldest first, with what was open of it then. */
+  letters: z.array(
+    z.strictObject({
+      id: z.uuid(),
+      kind: z.enum(invoiceLetterKinds),
+      email: z.string(),
+      at: z.string(),
+      byName: z.string(),
+      open_minor: z.int(),
     }),
   ),
   sha256: z.string().nullable(),

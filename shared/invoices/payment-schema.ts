@@ -153,6 +153,8 @@ export const checkoutSchema = z.strictObject({
   /** Where the client pays, while it can be paid. */
   url: z.string().nullable(),
   open_minor: z.int(),
+  /** Whether a receipt was mailed since it was begun. */
+  isReceiptMailed: z.boolean(),
 });
 export type Checkout = z.infer<typeof checkoutSchema>;
 

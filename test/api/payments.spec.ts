@@ -13,9 +13,20 @@ import {
   remindOfInvoice,
   sendStatement,
 } from '#shared/invoices/owed-endpoints';
+import { sendInvoice } from '#shared/invoices/invoices-endpoints';
 import { recordPayment, refundPayment, sharePayment, writeOff } from '#shared/invoices/payments-endpoints';
 import { ledgerFaults } from './ledger';
-import { creditDraft, issued, paymentOf, readBack, sampleDraft, sampleInvoice, samplePayment } from './sample-invoice';
+import {
+  creditDraft,
+  issued,
+  paymentOf,
+  readBack,
+  sampleContent,
+  sampleDraft,
+  sampleInvoice,
+  samplePayment,
+} from './sample-invoice';
+import { clientNamed, enterClient } from './sample-job';
 import { startApi, type Api } from './start-api';
 
 let api: Api;
@@ -354,6 +365,29 @@ describe('what is owed', () => {
     expect(mail.text).toContain('Kindly');
     expect(mail.html).toContain('Kindly');
     expect(mail.enclosures.map(({ media }) => media)).toEqual(['application/pdf', 'application/xml']);
+    // 100.00 and 20 % of tax, nothing of it paid.
+    const told = { kind: 'reminder', email: 'office@museum.example', open_minor: 12_000 };
+    expect((await readBack(api.ours, sample.invoiceId)).letters).toMatchObject([told]);
+  });
+
+  it('is mailed to the address that is known by now where none stood on it, and warns while none is known', async () => {
+    const clientId = await enterClient(api.as('owner'), clientNamed(`Herons ${randomUUID()}`, { email: '' }));
+    const { buyer } = sampleContent('Herons', clientId);
+    const draft = await sampleDraft(api.ours, { clientId, buyer: { ...buyer, email: '' } });
+    const warned = await readBack(api.ours, draft.invoiceId);
+    expect(warned.findings).toMatchObject([{ kind: 'warn', code: 'invoice-buyer-email' }]);
+    const { id: invoiceId } = await issued(api.ours, draft.invoiceId);
+    const send = () =>
+      api.as('office').call(sendInvoice, { params: { invoiceId }, body: { note: '' }, key: randomUUID() });
+    expect(typeOf(await send())).toBe('urn:problem:letter-no-address');
+    await api.platform.database.execute('UPDATE clients SET email = :email WHERE id = :clientId', {
+      ...{ clientId, email: 'found@later.example' },
+    });
+    expect((await send()).status).toBe(204);
+    expect((await api.mails())[0].headers).toMatch(/^To: .*found@later\.example/m);
+    const { mailsTo, letters } = await readBack(api.ours, invoiceId);
+    expect(mailsTo).toBe('found@later.example');
+    expect(letters).toMatchObject([{ kind: 'paper', email: 'found@later.example', open_minor: 12_000 }]);
   });
 
   it('goes to the client as a statement by mail, the same paper enclosed', async () => {

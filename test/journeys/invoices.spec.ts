@@ -1,8 +1,7 @@
-import { listInvoices } from '#shared/invoices/invoices-endpoints';
-import type { InvoiceSummary } from '#shared/invoices/invoice-schema';
 import type { Journal } from '#shared/invoices/payment-schema';
 import { acceptedIssue } from '../api/sample-client-visit';
-import { Walk, type Person } from './walk';
+import { issueFirst, papersOf, sayWhoWeAre } from './office-journey';
+import { Walk } from './walk';
 
 /** From a contract to money in the books, as the office does it. */
 let walk: Walk;
@@ -13,51 +12,11 @@ afterAll(() => walk.end());
 
 const twoMonths_minutes = 60 * 24 * 60;
 
-/** Who the workshop is on its invoices, entered by hand. */
-async function sayWhoWeAre({ page }: Person): Promise<void> {
-  await page.goto(`${walk.address}/accounts/settings`);
-  await page.getByLabel('VAT number').fill('atu 87654321');
-  await page.getByLabel('IBAN').fill('AT61 1904 3002 3457 3202');
-  await page.getByRole('button', { name: 'Keep it like this' }).click();
-  await page.getByText('This IBAN does not add up.').waitFor();
-  await page.getByLabel('IBAN').fill('AT61 1904 3002 3457 3201');
-  await page.getByRole('button', { name: 'Keep it like this' }).click();
-  await page.getByText('How we invoice is kept.').waitFor();
-}
-
-const papersOf = async (jobId: string): Promise<InvoiceSummary[]> => {
-  const answer = await walk.api.as('office').call(listInvoices, { query: { jobId } });
-  return (answer.body as { items: InvoiceSummary[] }).items;
-};
-
-/** The first thing that may be invoiced of a job, drafted and issued. */
-async function issueFirst({ page, see }: Person, jobId: string): Promise<InvoiceSummary> {
-  await page.goto(`${walk.address}/jobs/${jobId}`);
-  await page
-    .getByRole('button', { name: /^Draft the invoice/ })
-    .first()
-    .click();
-  await page.waitForURL(/accounts\/invoices/);
-  await page.getByLabel('E-mail address').fill('accounts@museum.example');
-  await page.getByLabel('Note').fill('With thanks for the order.');
-  await page.getByText(/^kept/).waitFor();
-  await see('journey invoice draft');
-  await page.getByRole('button', { name: 'Issue it' }).click();
-  await page
-    .getByRole('dialog')
-    .getByRole('button', { name: /^Issue it over/ })
-    .click();
-  await page.getByRole('heading', { name: /^Invoice \d{4}-\d{4}/ }).waitFor();
-  const [issued] = await papersOf(jobId);
-  expect([issued.state, issued.open_minor]).toEqual(['issued', issued.due_minor]);
-  return issued;
-}
-
 it('drafts from the contract, issues, mails, takes part of the money, reminds, credits, and the journal agrees', async () => {
   const { jobId } = await acceptedIssue(walk.api.ours, walk.api);
   const office = await walk.as('office');
-  await sayWhoWeAre(office);
-  const issued = await issueFirst(office, jobId);
+  await sayWhoWeAre(walk, office);
+  const issued = await issueFirst(walk, office, { jobId, email: 'accounts@museum.example' });
   const { page } = office;
 
   await page.getByRole('button', { name: 'Mail it' }).click();
@@ -66,6 +25,8 @@ it('drafts from the contract, issues, mails, takes part of the money, reminds, c
   await page.getByText('The letter is on its way.').waitFor();
   const letter = (await walk.api.mails()).find(({ headers }) => headers.includes('accounts@museum.example'));
   expect(letter?.text).toContain('We begin on Monday.');
+  await page.getByRole('heading', { name: 'Letters about it' }).waitFor();
+  await page.getByText('Mailed to accounts@museum.example').waitFor();
 
   await page.getByRole('link', { name: 'Enter a payment' }).click();
   await page.getByLabel('Amount that arrived').fill('10');
@@ -73,7 +34,7 @@ it('drafts from the contract, issues, mails, takes part of the money, reminds, c
   await office.see('journey payment');
   await page.getByRole('button', { name: 'Enter the payment' }).click();
   await page.getByRole('heading', { name: 'Paid on it' }).waitFor();
-  expect((await papersOf(jobId))[0].open_minor).toBe(issued.due_minor - 10_00);
+  expect((await papersOf(walk, jobId))[0].open_minor).toBe(issued.due_minor - 10_00);
   expect(office.complaints).toEqual([]);
 
   walk.api.clock.move({ minutes: twoMonths_minutes });
@@ -84,6 +45,8 @@ it('drafts from the contract, issues, mails, takes part of the money, reminds, c
   await later.page.getByText('The letter is on its way.').waitFor();
   const reminder = (await walk.api.mails()).find(({ headers }) => headers.includes('still open'));
   expect(reminder?.text).toContain(issued.number ?? 'a number');
+  await later.page.getByText('Reminder to accounts@museum.example').waitFor();
+  await later.see('journey reminded');
 
   await later.page.getByRole('button', { name: 'Begin a credit note' }).click();
   await later.page.getByRole('button', { name: 'Issue it' }).click();
@@ -105,6 +68,6 @@ it('drafts from the contract, issues, mails, takes part of the money, reminds, c
     ['payment', -10_00],
   ]);
   const sums = later.page.getByRole('table', { name: 'Sums by kind' }).getByRole('row');
-  await expect(sums.last().textContent()).resolves.toMatch(/-10\.00\s*$/);
+  await expect(sums.last().textContent()).resolves.toMatch(/−10\.00\s*$/);
   expect(later.complaints).toEqual([]);
 }, 240_000);

@@ -4,7 +4,7 @@ import type { ClientInvoiceSummary } from '#shared/client-page/client-overview-s
 import type { InvoicePaper } from '#shared/invoices/invoice-schema';
 import type { Checkout } from '#shared/invoices/payment-schema';
 import { Rejection } from '#shared/problems/rejection';
-import { presentCheckout, type Invoices, type InvoiceRow } from '../invoices';
+import type { Invoices, InvoiceRow } from '../invoices';
 import type { FileAnswer } from '../platform/http/answer';
 import type { ClientInvoices } from './client-invoices';
 
@@ -15,31 +15,33 @@ interface Parts {
   readonly returnUrl: (checkoutId: string) => string;
 }
 
-const summaryOf = (row: InvoiceRow): ClientInvoiceSummary => ({
+const summaryOf = (row: InvoiceRow, today: string): ClientInvoiceSummary => ({
   id: row.id,
+  kind: row.kind,
   jobId: row.jobId,
   number: row.number ?? '',
   issuedOn: row.issuedOn ?? '',
-  dueOn: row.dueOn ?? row.issuedOn ?? '',
+  dueOn: row.dueOn,
   due_minor: row.dueMinor,
   open_minor: row.openMinor,
+  credited_minor: row.creditedMinor,
   currency: row.currency,
+  isOverdue: row.openMinor > 0 && row.dueOn !== null && row.dueOn < today,
 });
 
 /** What a client may see and pay: issued invoices of the job of their link, or all that are theirs. Drafts are not there. */
 export class ClientInvoiceService implements ClientInvoices {
   constructor(private readonly parts: Parts) {}
 
-  readonly of = async (client: ClientActor): Promise<readonly ClientInvoiceSummary[]> =>
-    (await this.rows(client)).filter(({ kind }) => kind === 'invoice').map(summaryOf);
+  readonly of = async (client: ClientActor): Promise<readonly ClientInvoiceSummary[]> => {
+    const today = await this.parts.invoices.reading.today(client.workshopId);
+    return (await this.rows(client)).map((row) => summaryOf(row, today));
+  };
 
   async list(client: ClientActor): Promise<ClientInvoice[]> {
     const today = await this.parts.invoices.reading.today(client.workshopId);
     return (await this.rows(client)).map((row) => ({
-      ...summaryOf(row),
-      kind: row.kind,
-      dueOn: row.dueOn,
-      isOverdue: row.openMinor > 0 && row.dueOn !== null && row.dueOn < today,
+      ...summaryOf(row, today),
       papers: row.xmlFileId === null ? ['invoice.pdf'] : ['invoice.pdf', 'invoice.xml'],
       mayPayByCard:
         this.parts.paysByCard() && row.openMinor > 0 && this.parts.invoices.checkouts.mayCharge(row.currency),
@@ -56,16 +58,14 @@ export class ClientInvoiceService implements ClientInvoices {
     const { accessId, name, email } = client;
     const payer = { accessId, name, email, returnUrl: this.parts.returnUrl };
     const checkout = await this.parts.invoices.checkouts.begin(client.workshopId, invoiceId, payer);
-    return presentCheckout(checkout, (await this.own(client, invoiceId)).openMinor);
+    return this.parts.invoices.reading.checkout(checkout);
   }
 
   async ask(client: ClientActor, checkoutId: string): Promise<Checkout> {
     const { checkouts } = this.parts.invoices;
     const found = await checkouts.get(client.workshopId, checkoutId);
     await this.own(client, found.invoiceId);
-    const checkout = await checkouts.ask(client.workshopId, checkoutId);
-    const { openMinor } = await this.own(client, found.invoiceId);
-    return presentCheckout(checkout, openMinor);
+    return this.parts.invoices.reading.checkout(await checkouts.ask(client.workshopId, checkoutId));
   }
 
   private rows({ workshopId, clientId, jobId }: ClientActor): Promise<InvoiceRow[]> {

@@ -3,7 +3,7 @@ import type { ClientInvoiceSummary } from '#shared/client-page/client-overview-s
 
 /** The port through which the page learns what a client owes; `invoices` supplies it. */
 export interface ClientInvoices {
-  /** Invoices of the client (of one job, where the visit is to one), the newest first. */
+  /** Invoices and credit notes of the client (of one job, where the visit is to one), the newest first. */
   readonly of: (client: ClientActor) => Promise<readonly ClientInvoiceSummary[]>;
 }
 

@@ -1,7 +1,7 @@
 import type { Invoice, InvoiceSummary } from '#shared/invoices/invoice-schema';
 import type { Checkout, Payment } from '#shared/invoices/payment-schema';
 import type { InvoiceRow } from './invoice-model';
-import type { CheckoutRow, PaymentRow, WriteOffRow } from './payment-model';
+import type { CheckoutRow, InvoiceLetterRow, PaymentRow, WriteOffRow } from './payment-model';
 
 interface Facts {
   readonly clientName: string;
@@ -42,10 +42,11 @@ const papersOf = ({ pdfFileId, xmlFileId }: InvoiceRow): Invoice['papers'] => [
 export const presentInvoice = (
   row: InvoiceRow,
   facts: Facts,
-  worked: Pick<Invoice, 'rounding_minor'> & {
+  worked: Pick<Invoice, 'rounding_minor' | 'mailsTo'> & {
     readonly totals: object;
     readonly findings: readonly object[];
     readonly writeOffs: readonly WriteOffRow[];
+    readonly letters: readonly InvoiceLetterRow[];
   },
 ): Invoice => ({
   ...presentSummary(row, facts),
@@ -56,6 +57,10 @@ export const presentInvoice = (
   findings: [...worked.findings] as Invoice['findings'],
   writeOffs: worked.writeOffs.map(({ id, amountMinor: amount_minor, reason, writtenOn, byName }) => {
     return { id, amount_minor, reason, writtenOn, byName };
+  }),
+  mailsTo: worked.mailsTo,
+  letters: worked.letters.map(({ id, kind, email, at, byName, openMinor: open_minor }) => {
+    return { id, kind, email, at: at.toISOString(), byName, open_minor };
   }),
   sha256: row.sha256,
   papers: papersOf(row),
@@ -80,7 +85,11 @@ export const presentPayment = (
   recordedBy: row.recordedBy,
 });
 
-export const presentCheckout = (row: CheckoutRow, open_minor: number): Checkout => ({
+/** A checkout with what is open of its invoice now and the letters about it. */
+export const presentCheckout = (
+  row: CheckoutRow,
+  { open_minor, letters }: { readonly open_minor: number; readonly letters: readonly InvoiceLetterRow[] },
+): Checkout => ({
   id: row.id,
   invoiceId: row.invoiceId,
   state: row.state,
@@ -88,4 +97,5 @@ export const presentCheckout = (row: CheckoutRow, open_minor: number): Checkout 
   currency: row.currency,
   url: row.state === 'open' ? row.url : null,
   open_minor,
+  isReceiptMailed: letters.some(({ kind, at }) => kind === 'receipt' && at >= row.createdAt),
 });

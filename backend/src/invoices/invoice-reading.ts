@@ -1,17 +1,18 @@
 import type { Invoice, InvoicePaper, InvoiceSummary } from '#shared/invoices/invoice-schema';
 import { invoiceFindings } from '#shared/invoices/invoice-findings';
-import type { Payment } from '#shared/invoices/payment-schema';
+import { mailsToOf } from '#shared/invoices/mails-to-of';
+import type { Checkout, Payment } from '#shared/invoices/payment-schema';
 import { Rejection } from '#shared/problems/rejection';
 import { FileAnswer } from '../platform/http/answer';
 import type { Page, PageAsked } from '../platform/database/workshop-rows';
 import { thawedInvoice } from './frozen-invoice';
 import type { InvoiceRow } from './invoice-model';
 import { todayIn, type InvoiceParts } from './invoice-parts';
-import { presentInvoice, presentPayment, presentSummary } from './invoice-presenter';
+import { presentCheckout, presentInvoice, presentPayment, presentSummary } from './invoice-presenter';
 import type { InvoicesAsked } from './invoice-repository';
 import type { IssuingService } from './issuing-service';
 import type { LedgerService } from './ledger-service';
-import type { PaymentRow } from './payment-model';
+import type { CheckoutRow, PaymentRow } from './payment-model';
 
 interface Parts extends InvoiceParts {
   readonly issuing: IssuingService;
@@ -59,14 +60,25 @@ export class InvoiceReading {
     const { workshopId } = row;
     const client = await this.parts.jobs.client(workshopId, row.clientId);
     const facts = { clientName: client.name, today: await todayIn(this.parts, workshopId) };
+    const mailsTo = mailsToOf(row.content.buyer, client);
     if (row.state === 'issued') {
       const { totals, rounding_minor } = thawedInvoice(row);
       const writeOffs = await this.parts.payments.writeOffsOf(workshopId, row.id);
-      return presentInvoice(row, facts, { totals, rounding_minor, findings: [], writeOffs });
+      const letters = await this.parts.invoices.lettersOf(workshopId, row.id);
+      return presentInvoice(row, facts, { totals, rounding_minor, findings: [], writeOffs, letters, mailsTo });
     }
     const hand = await this.parts.issuing.inHand(row, await this.parts.settings.read(workshopId));
     const { totals, rounding_minor } = hand.worked;
-    return presentInvoice(row, facts, { totals, rounding_minor, findings: invoiceFindings(hand), writeOffs: [] });
+    const none = { writeOffs: [], letters: [] };
+    return presentInvoice(row, facts, { totals, rounding_minor, findings: invoiceFindings(hand), mailsTo, ...none });
+  }
+
+  /** A payment by card as it stands, with what is open of its invoice now. */
+  async checkout(row: CheckoutRow): Promise<Checkout> {
+    const { workshopId, invoiceId } = row;
+    const { openMinor } = await this.parts.invoices.get(workshopId, invoiceId);
+    const letters = await this.parts.invoices.lettersOf(workshopId, invoiceId);
+    return presentCheckout(row, { open_minor: openMinor, letters });
   }
 
   /** A paper as it was kept. */

@@ -4,6 +4,7 @@ import type { InvoiceState } from '#shared/invoices/invoice-schema';
 import type { Database } from '../platform/database/database';
 import { WorkshopRows, type Page, type PageAsked } from '../platform/database/workshop-rows';
 import { invoiceTable, type InvoiceRow } from './invoice-model';
+import { invoiceLetterTable, type InvoiceLetterRow } from './payment-model';
 
 export interface InvoicesAsked extends PageAsked {
   readonly jobId?: string | undefined;
@@ -13,10 +14,17 @@ export interface InvoicesAsked extends PageAsked {
   readonly open?: 'yes' | undefined;
 }
 
-/** Invoices and credit notes. */
+/** Invoices and credit notes, and the letters that went out about them. */
 export class InvoiceRepository extends WorkshopRows<InvoiceRow> {
+  readonly letters: WorkshopRows<InvoiceLetterRow>;
+
   constructor(database: Database) {
     super(invoiceTable(database));
+    this.letters = new WorkshopRows(invoiceLetterTable(database));
+  }
+
+  lettersOf(workshopId: string, invoiceId: string): Promise<InvoiceLetterRow[]> {
+    return this.letters.list(workshopId, { where: { invoiceId } });
   }
 
   pageOf(workshopId: string, asked: InvoicesAsked): Promise<Page<InvoiceRow>> {

@@ -5,6 +5,7 @@ import { isExchangeCurrency } from '#shared/invoices/exchange-currency';
 import type { FrozenInvoice, PayeeAccount } from '#shared/invoices/invoice';
 import { invoiceFindings } from '#shared/invoices/invoice-findings';
 import type { InvoiceInHand } from '#shared/invoices/invoice-in-hand';
+import { mailsToOf } from '#shared/invoices/mails-to-of';
 import { Rejection } from '#shared/problems/rejection';
 import { fileName } from '../documents';
 import { jobNumber } from '../jobs';
@@ -38,12 +39,14 @@ export class IssuingService {
   async inHand(row: InvoiceRow, settings: KeptSettings): Promise<InvoiceInHand> {
     const { content, kind, currency } = row;
     const { country } = await this.parts.workshops.get(row.workshopId);
+    const client = await this.parts.jobs.client(row.workshopId, row.clientId);
     const issuedOn = await todayIn(this.parts, row.workshopId);
     const known_minor = row.claim ? await this.parts.stages.roundingOf(row) : this.knownOf(row);
     return {
       ...{ kind, content, currency, country, issuedOn },
       ...{ seller: settings.seller, account: accountOf(row, settings) },
       worked: exactAmounts(content, currency, known_minor),
+      mailsTo: mailsToOf(content.buyer, client),
       dueOn: kind === 'invoice' ? dueDay(issuedOn, content.dueOn, settings.due_days) : null,
     };
   }

@@ -1,3 +1,4 @@
+import type { InvoiceLetterKind } from '#shared/invoices/invoice-schema';
 import type { CheckoutState, PaymentWay } from '#shared/invoices/payment-schema';
 import { column } from '../platform/database/columns';
 import type { Database } from '../platform/database/database';
@@ -58,7 +59,9 @@ export interface CheckoutRow extends WorkshopRow {
   readonly createdAt: Date;
 }
 
-export interface ReminderRow extends WorkshopRow {
+/** A letter that went out about an invoice, and what was open of it then. */
+export interface InvoiceLetterRow extends WorkshopRow {
+  readonly kind: InvoiceLetterKind;
   readonly invoiceId: string;
   readonly openMinor: number;
   readonly email: string;
@@ -121,9 +124,10 @@ export const checkoutTable = (database: Database) =>
     createdAt: column.instant,
   });
 
-export const reminderTable = (database: Database) =>
-  database.table<ReminderRow>('reminders', {
+export const invoiceLetterTable = (database: Database) =>
+  database.table<InvoiceLetterRow>('invoice_letters', {
     ...own,
+    kind: column.word,
     invoiceId: column.reference,
     openMinor: column.minor,
     email: column.word,

@@ -22,7 +22,6 @@ import { FileAnswer } from '../platform/http/answer';
 import { mount, type Route } from '../platform/http/mount';
 import type { CheckoutService } from './checkout-service';
 import type { InvoiceLetters } from './invoice-letters';
-import { presentCheckout } from './invoice-presenter';
 import type { InvoiceReading } from './invoice-reading';
 import type { LedgerPapers } from './ledger-papers';
 import type { LedgerService } from './ledger-service';
@@ -69,11 +68,9 @@ export const paymentRoutes = (parts: Parts): Route[] => {
     mount(writeOff, async ({ actor, params, body }) =>
       reading.read(await recording.writeOff(actor, params.invoiceId, body)),
     ),
-    mount(askCheckout, async ({ actor, params }) => {
-      const checkout = await checkouts.ask(actor.workshopId, params.checkoutId);
-      const { open_minor } = await reading.get(actor.workshopId, checkout.invoiceId);
-      return presentCheckout(checkout, open_minor);
-    }),
+    mount(askCheckout, async ({ actor, params }) =>
+      reading.checkout(await checkouts.ask(actor.workshopId, params.checkoutId)),
+    ),
     mount(listUnknownPaymentEvents, async () => ({ items: await checkouts.unknownEvents() })),
     mount(takePaymentEvent, async ({ signed }) => {
       if (signed) await checkouts.take(signed);

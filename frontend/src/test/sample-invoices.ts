@@ -39,7 +39,7 @@ export const sampleInvoice = (more: Partial<Invoice> = {}): Invoice => ({
     ],
     ...{ deliveredOn: null, period: null, dueOn: null, terms: '', roundsToCash: false, note: '' },
   },
-  ...{ claim: null, rounding_minor: 0, findings: [], writeOffs: [] },
+  ...{ claim: null, rounding_minor: 0, findings: [], writeOffs: [], letters: [], mailsTo: 'house@ashgrove.example' },
   ...{ sha256: 'ab'.repeat(32), papers: ['invoice.pdf', 'invoice.xml'] },
   totals: {
     ...{ lineNets_minor: [160_00, 40_00], lineSum_minor: 200_00, allowances_minor: 0, charges_minor: 0 },

@@ -3,6 +3,8 @@ export const invoices = {
   'invoice-refused': 'The invoice cannot be issued as it stands.',
   'invoice-no-lines': 'There is nothing on it yet. Please enter at least one line.',
   'invoice-buyer-address': 'The client’s address is empty. Most countries want it on an invoice.',
+  'invoice-buyer-email':
+    'No e-mail address of {client} is known, so nothing about it can be mailed: not the paper, no reminder, no receipt.',
   'invoice-seller-number':
     'Nothing says who you are: enter a VAT number, a tax number or a company number in the settings of invoices.',
   'invoice-seller-tax-number': 'An invoice with these tax categories needs your VAT number or tax number.',
@@ -66,7 +68,7 @@ export const invoices = {
   'write-off-over': 'Only {open_minor} is open.',
   'reminder-not-due': 'Invoice {number} is not overdue.',
   'reminder-no-address': 'No e-mail address is known for {name}.',
-  'letter-no-address': 'No e-mail address stands on the invoice.',
+  'letter-no-address': 'No e-mail address of {name} is known, neither on the paper nor in the list of clients.',
   'checkout-nothing-open': 'Nothing is open on this invoice.',
   'checkout-currency': 'Cards cannot be charged in {currency} here.',
   'checkout-unreachable': 'The payment service cannot be reached just now. Please try again shortly.',

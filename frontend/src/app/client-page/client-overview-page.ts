@@ -27,6 +27,9 @@ export class ClientOverviewPage {
     loader: ({ abortSignal }) => this.api.call(readClientOverview, { signal: abortSignal }),
   });
   protected readonly papers = computed(() => (this.overview.hasValue() ? this.overview.value() : undefined));
+  protected readonly hasCreditNotes = computed(
+    () => this.papers()?.invoices.some(({ kind }) => kind === 'credit-note') ?? false,
+  );
   protected readonly isEmpty = computed(() => {
     const papers = this.papers();
     return papers?.jobs.every(({ issues }) => issues.length === 0) && papers.invoices.length === 0;

@@ -78,6 +78,42 @@ describe('ClientOverviewPage', () => {
     ]);
   });
 
+  it('lists invoices and credit notes with what became of each', async () => {
+    const invoice = {
+      ...{
+        id: clientId(80),
+        kind: 'invoice',
+        jobId: null,
+        number: '2026-0007',
+        issuedOn: '2026-03-02',
+        currency: 'EUR',
+      },
+      ...{ dueOn: '2026-03-16', due_minor: 246_00, open_minor: 0, credited_minor: 0, isOverdue: false },
+    };
+    const page = await open(
+      overview({
+        invoices: [
+          { ...invoice, kind: 'credit-note', number: 'C2026-0001', dueOn: null },
+          { ...invoice, id: clientId(81), credited_minor: 246_00 },
+          { ...invoice, id: clientId(82), credited_minor: 46_00 },
+          { ...invoice, id: clientId(83), open_minor: 246_00, isOverdue: true },
+          { ...invoice, id: clientId(84) },
+        ],
+      }),
+    );
+    const texts = [...page.element.querySelectorAll('main a[href*="/client/invoices/"]')].map((link) =>
+      (link.textContent ?? '').replace(/\s+/g, ' ').trim(),
+    );
+    expect(texts).toEqual([
+      expect.stringMatching(/^Credit note C2026-0001.*[-−]€246\.00.*of /),
+      expect.stringMatching(/€246\.00 ?credited$/),
+      expect.stringMatching(/settled, €46\.00 of it credited$/),
+      expect.stringMatching(/€246\.00 open ?, due .*2026 ?, overdue$/),
+      expect.stringMatching(/€246\.00 ?paid$/),
+    ]);
+    expect(page.text).toContain('Invoices and credit notes');
+  });
+
   it('says that nothing is here yet', async () => {
     expect((await open(overview({ jobs: [] }))).text).toContain('Nothing is here yet.');
   });

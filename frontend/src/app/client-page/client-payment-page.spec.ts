@@ -1,3 +1,4 @@
+import { TestBed } from '@angular/core/testing';
 import type { Checkout } from '#shared/invoices/payment-schema';
 import { BooksVisit, invoiceId } from '../../test/sample-invoices';
 import { ClientPaymentPage } from './client-payment-page';
@@ -5,12 +6,19 @@ import { ClientPaymentPage } from './client-payment-page';
 const checkoutId = invoiceId(70);
 const checkout = (more: Partial<Checkout>): Checkout => ({
   ...{ id: checkoutId, invoiceId: invoiceId(10), state: 'open', amount_minor: 246_00, currency: 'EUR' },
-  ...{ url: 'https://pay.example/1', open_minor: 246_00 },
+  ...{ url: 'https://pay.example/1', open_minor: 246_00, isReceiptMailed: false },
   ...more,
 });
 const invoice = {
   ...{ id: invoiceId(10), kind: 'invoice', jobId: null, number: '2026-0007', issuedOn: '2026-03-02' },
-  ...{ dueOn: '2026-03-16', due_minor: 246_00, open_minor: 246_00, currency: 'EUR', isOverdue: false },
+  ...{
+    dueOn: '2026-03-16',
+    due_minor: 246_00,
+    open_minor: 246_00,
+    credited_minor: 0,
+    currency: 'EUR',
+    isOverdue: false,
+  },
   ...{ papers: ['invoice.pdf'], mayPayByCard: true },
 };
 const state = `/api/client/checkouts/${checkoutId}/state`;
@@ -35,6 +43,15 @@ describe('ClientPaymentPage', () => {
     const visit = await begin(checkout({ state: found, ...more }));
     expect(visit.element.querySelector('h1')?.textContent?.trim()).toBe(heading);
     expect(visit.text).toMatch(sentence);
+  });
+
+  it('promises a receipt where one was mailed, and nowhere else', async () => {
+    const paid = { state: 'paid', open_minor: 0, url: null } as const;
+    expect((await begin(checkout(paid))).text).not.toContain('receipt');
+    TestBed.resetTestingModule();
+    expect((await begin(checkout({ ...paid, isReceiptMailed: true }))).text).toContain(
+      'A receipt is on its way to you by mail.',
+    );
   });
 
   it('asks again by itself while it is open, keeps what it knew meanwhile, and then tells what has come', async () => {

@@ -5,6 +5,7 @@ export type FindingPlace = 'buyer' | 'lines' | 'dates' | 'settings' | 'sums';
 
 const places: Readonly<Record<string, FindingPlace>> = {
   'invoice-buyer-address': 'buyer',
+  'invoice-buyer-email': 'buyer',
   'invoice-buyer-number': 'buyer',
   'invoice-buyer-vat-number': 'buyer',
   'invoice-no-lines': 'lines',

@@ -19,6 +19,7 @@ import type { PaymentEntry, RefundEntry } from '#shared/invoices/payment-schema'
 import type { Share } from '#shared/invoices/payment-shares';
 import {
   listPayments,
+  listUnknownPaymentEvents,
   recordPayment,
   refundPayment,
   sharePayment,
@@ -95,6 +96,10 @@ export class InvoiceCalls {
 
   payments(clientId: string | undefined, cursor: string | undefined, signal: AbortSignal) {
     return this.api.call(listPayments, { query: { clientId, cursor }, signal });
+  }
+
+  async unknownEvents(signal: AbortSignal) {
+    return (await this.api.call(listUnknownPaymentEvents, { signal })).items;
   }
 
   recordPayment(body: PaymentEntry, idempotencyKey: string) {

@@ -164,6 +164,24 @@ describe('InvoicePage, issued', () => {
     expect(papers).toEqual([`${address}/papers/invoice.pdf`, `${address}/papers/invoice.xml`]);
   });
 
+  it('says what was mailed about it, where, when, by whom, and what was open then', async () => {
+    const letter = { email: 'house@ashgrove.example', open_minor: 246_00, byName: 'Imke Vale' };
+    const letters = [
+      { ...letter, id: invoiceId(61), kind: 'paper' as const, at: '2026-03-02T09:00:00.000Z' },
+      { ...letter, id: invoiceId(62), kind: 'reminder' as const, at: '2026-03-20T09:00:00.000Z', open_minor: 100_00 },
+      { ...letter, id: invoiceId(63), kind: 'receipt' as const, at: '2026-03-21T09:00:00.000Z', byName: '' },
+    ];
+    const visit = await begin(sampleInvoice({ letters }));
+    const texts = [...visit.element.querySelectorAll('app-invoice-related li')].map((one) =>
+      (one.textContent ?? '').replace(/\s+/g, ' ').trim(),
+    );
+    expect(texts).toEqual([
+      expect.stringMatching(/^Mailed to house@ashgrove\.example ?2 Mar 2026, Imke Vale ?€246\.00 open then$/),
+      expect.stringMatching(/^Reminder to house@ashgrove\.example ?20 Mar 2026, Imke Vale ?€100\.00 open then$/),
+      expect.stringMatching(/^Receipt to house@ashgrove\.example ?21 Mar 2026 ?€246\.00 open then$/),
+    ]);
+  });
+
   it('says what a price is for, why no tax is charged and by which code, and what was given up by whom', async () => {
     const issued = sampleInvoice();
     const line = {

@@ -44,6 +44,12 @@ export class InvoiceRelated {
     ),
   );
 
+  /** When a letter left, and who sent it; a receipt leaves by itself. */
+  protected toldOf({ at, byName }: Invoice['letters'][number]): string {
+    const day = this.formats.dayOf(at);
+    return byName === '' ? day : $localize`${day}:day:, ${byName}:name:`;
+  }
+
   private async read({ id, clientId, kind, creditedInvoiceId }: Invoice, signal: AbortSignal): Promise<Related> {
     if (kind === 'credit-note') {
       const credited = creditedInvoiceId ? await this.calls.read(creditedInvoiceId, signal) : undefined;

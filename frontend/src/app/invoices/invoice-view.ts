@@ -65,10 +65,11 @@ export class InvoiceView {
     }));
   });
   protected readonly letterAbout = computed(() => {
-    const { email, name } = this.invoice().content.buyer;
-    return email
-      ? $localize`It goes to ${email}:email:.`
-      : $localize`No e-mail address of ${name}:name: stands on the invoice.`;
+    const { mailsTo, content } = this.invoice();
+    const { name } = content.buyer;
+    return mailsTo
+      ? $localize`It goes to ${mailsTo}:email:.`
+      : $localize`No e-mail address of ${name}:name: is known. Enter one in the list of clients first.`;
   });
   protected readonly mail = (note: string, key: string) => this.calls.mail(this.invoice().id, note, key);
   protected readonly remind = (note: string, key: string) => this.calls.remind(this.invoice().id, note, key);

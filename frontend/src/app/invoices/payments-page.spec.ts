@@ -29,6 +29,17 @@ describe('PaymentsPage', () => {
       expect(visit.text).toContain(text);
   });
 
+  it('lists what the payment service told of payments nobody here has begun', async () => {
+    const visit = await shown([payment()]);
+    const event = { id: 'evt_told', kind: 'checkout.session.completed', receivedAt: '2026-03-05T10:15:00.000Z' };
+    await visit.answer('GET', '/api/payment-events', { items: [event] });
+    expect(visit.element.querySelector('app-unknown-events summary')?.textContent).toContain('not begun here: 1');
+    expect(visit.text).toContain('evt_told');
+    await visit.press('Ask again');
+    await visit.answer('GET', '/api/payment-events', { items: [] });
+    expect(visit.text).not.toContain('evt_told');
+  });
+
   it('names what went back and what came back, and offers nothing to be given back of those', async () => {
     const beside = { refundsPaymentId: invoiceId(40), way: 'card' as const, shares: [], credit_minor: 0 };
     const visit = await shown([

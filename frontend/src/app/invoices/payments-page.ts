@@ -10,6 +10,7 @@ import { InvoiceCalls } from './invoice-calls';
 import { movementName, paymentWayNames } from './invoice-names';
 import { PaymentRefund } from './payment-refund';
 import { PaymentSharing } from './payment-sharing';
+import { UnknownEvents } from './unknown-events';
 
 interface Opened {
   readonly paymentId: string;
@@ -19,7 +20,7 @@ interface Opened {
 /** Payments and refunds, the newest first, each with the invoices it is for and what of it lies to the client's credit. */
 @Component({
   selector: 'app-payments-page',
-  imports: [EmptyState, ListBody, MatButton, PaymentRefund, PaymentSharing, RouterLink],
+  imports: [EmptyState, ListBody, MatButton, PaymentRefund, PaymentSharing, RouterLink, UnknownEvents],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './payments-page.html',
   styleUrl: './payments-page.scss',
