@@ -33,13 +33,14 @@ it('coats a member on its own by the keyboard alone, names its lot, and undoes i
   const { page, complaints, see } = await walk.as('estimator');
   await page.goto(placeOf(sample, 'dry'));
   const foot = page.getByRole('combobox', { name: /^Foot/ });
+  const lots = page.getByRole('grid', { name: 'Lots' });
   await foot.focus();
   await page.keyboard.press('o');
-  await page.getByRole('gridcell', { name: /^Foot: Water gilding, burnished/ }).waitFor();
-  await page.getByRole('gridcell', { name: /^Foot: Water gilding, burnished/ }).click();
+  await lots.getByRole('gridcell', { name: /^Foot: Water gilding, burnished/ }).waitFor();
+  await lots.getByRole('gridcell', { name: /^Foot: Water gilding, burnished/ }).click();
   await page.getByLabel('Name of the lot').fill('Feet, assembled');
   await page.keyboard.press('Enter');
-  await page.getByRole('gridcell', { name: /^Feet, assembled: Water gilding/ }).waitFor();
+  await lots.getByRole('gridcell', { name: /^Feet, assembled: Water gilding/ }).waitFor();
   await page.getByText(/^kept/).waitFor();
   await see('journey lots');
   expect(await kept(sample)).toEqual(['', 'Feet, assembled']);

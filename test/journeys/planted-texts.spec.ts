@@ -44,12 +44,9 @@ afterAll(() => walk.end());
 
 /** Text without a form of its own, which is refused all the same because another rule knows what it must be. */
 const knownByARule =
-  /\.(email|website|currency|locale|timeZone|password|token|current|vatId|iban|bic)$|^(markTask\.taskId|readWhatIf\.lots\.\*\.lotId|keepPlan\..*)$/;
-/**
- * The browser makes these to tell the elements of a profile apart, or names steps of a programme by them; nobody reads them. Why
- * something was written off is kept and stands on no page yet.
- */
-const shownNowhere = /\.(profile\.\*\.id|take\.parts\.\*|lotId|taskId|approvalId)$|^writeOff\.reason$/;
+  /\.(email|website|currency|locale|timeZone|password|token|current|vatId|iban|bic|reasonCode)$|^(markTask\.taskId|readWhatIf\.lots\.\*\.lotId|keepPlan\..*)$/;
+/** The browser makes these to tell the elements of a profile apart, or names steps of a programme by them; nobody reads them. */
+const shownNowhere = /\.(profile\.\*\.id|take\.parts\.\*|lotId|taskId|approvalId)$/;
 
 /** What no page of ours makes: had a text become markup, one of these would stand there. */
 const marks =
@@ -106,6 +103,22 @@ test('every page shows them as text', async () => {
   await lookAtAll(scene.person, memberPages);
   expect(faults).toEqual([]);
 }, 300_000);
+
+test('every further line that is opened shows them as text', async () => {
+  const { page } = scene.person;
+  const { jobId, estimateId } = scene.sample;
+  await page.goto(`${walk.address}/jobs/${jobId}/estimates/${estimateId}/price?part=extras`);
+  const lines = page
+    .getByRole('grid')
+    .getByRole('row')
+    .filter({ has: page.getByRole('gridcell') });
+  await lines.first().waitFor();
+  for (const line of await lines.all()) {
+    await line.getByRole('gridcell').first().click();
+    await lookAt(page, 'a further line');
+  }
+  expect(faults).toEqual([]);
+}, 60_000);
 
 test('every page of a client shows them as text', async () => {
   await lookAtAll(client, clientPages);

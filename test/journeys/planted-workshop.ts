@@ -12,6 +12,7 @@ import type { Endpoint } from '#shared/actor/endpoint';
 import { beginEstimate, changeEstimate, takeRateCard } from '#shared/estimates/estimates-endpoints';
 import { issueEstimate, markIssue } from '#shared/estimates/issues-endpoints';
 import type { MemberContent } from '#shared/estimates/member';
+import type { MeasuredWork } from '#shared/estimates/price/measured-work';
 import type { EstimateSettings, ExtraLine } from '#shared/estimates/settings';
 import { keepClient } from '#shared/jobs/clients-endpoints';
 import { keepJob } from '#shared/jobs/jobs-endpoints';
@@ -213,8 +214,28 @@ const fullMember = (content: MemberContent, at: number): MemberContent => ({
 
 const anyExtra = () => ({ id: newId(), name: 'x', taxCategoryId: '', memberId: null, alternativeId: null });
 
+const unmeasured = { length: null, girth: null, area: null, sides: 1, worth: 1 } as const;
+
+/** A line whose quantity of 2 m² is reckoned from what was measured. */
+const measuredExtra = (taxCategoryId: string, measured: MeasuredWork): ExtraLine => ({
+  ...{
+    ...anyExtra(),
+    taxCategoryId,
+    kind: 'paid-quantity',
+    rule: 'x',
+    quantity: '2',
+    unit: 'm²',
+    price: '3',
+    measured,
+  },
+});
+
 const extrasOf = (taxCategoryId: string): ExtraLine[] => [
   { ...anyExtra(), taxCategoryId, kind: 'paid-quantity', rule: 'x', quantity: '2', unit: 'x', price: '3' },
+  measuredExtra(taxCategoryId, {
+    ...{ ...unmeasured, rule: 'plain-area', length: { text: 'x', mm: 1000 }, girth: { text: 'x', mm: 2000 } },
+  }),
+  measuredExtra(taxCategoryId, { ...unmeasured, rule: 'weighted', area: { text: 'x', mm2: 2_000_000 } }),
   { ...anyExtra(), taxCategoryId, kind: 'bought-in', cost: '10' },
 ];
 

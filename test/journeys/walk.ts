@@ -76,7 +76,9 @@ export class Walk {
     const page = await context.newPage();
     page.setDefaultTimeout(30_000);
     const complaints: string[] = [];
-    page.on('console', (message) => void (message.type() === 'error' && complaints.push(message.text())));
+    page.on('console', (message) => {
+      if (message.type() === 'error') complaints.push(`${message.text()} ${message.location().url}`.trim());
+    });
     page.on('pageerror', (error) => complaints.push(error.message));
     const see = async (name: string) => void (await page.screenshot({ path: join(pictures, `${name}.png`) }));
     return { page, context, complaints, see };
