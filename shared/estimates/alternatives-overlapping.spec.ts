@@ -22,7 +22,7 @@ const draftWith = (...alternatives: readonly ReturnType<typeof alternative>[]) =
   }) as unknown as Draft;
 
 const said = (draft: Draft) =>
-  overlappingAlternatives(draft).map(({ kind, about, values }) => [kind, about, values.second, values.part]);
+  overlappingAlternatives(draft).map(({ kind, about, values }) => [kind, about, values['second'], values['part']]);
 
 describe('overlappingAlternatives', () => {
   it.each([
