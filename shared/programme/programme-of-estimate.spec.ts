@@ -7,6 +7,7 @@ import { programme } from '#shared/programme/programme';
 import { millisecondsOf, programmeFrame } from '#shared/programme/programme-frame';
 import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import { programmeOfEstimate, type ProgrammeOfEstimateInput } from '#shared/programme/programme-of-estimate';
+import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeLag } from '#shared/programme/programme-request';
 import { shopOfCard } from '#shared/programme/shop-of-card';
 import { verifiedPlan } from '#shared/programme/verified-plan';
@@ -351,13 +352,15 @@ describe('Planned in the workshop’s own time', () => {
   it('never finishes sooner in colder air', () => {
     fc.assert(
       fc.property(fc.integer({ min: 10, max: 25 }), fc.integer({ min: 0, max: 10 }), (warm, by) => {
-        const finishAt = (temperature_celsius: number) => {
+        const planAt = (temperature_celsius: number, incumbent?: Programme) => {
           const { request } = programmeFor([panel], {
             inputs: { climate: { temperature_celsius, humidity_percent: 50 } },
           });
-          return programme(request, { limit: { nodes: 1 } }).lowerBound_minutes;
+          return programme(request, { limit: { nodes: 1 }, incumbent });
         };
-        expect(finishAt(warm - by < 6 ? 6 : warm - by)).toBeGreaterThanOrEqual(finishAt(warm));
+        const cold = planAt(Math.max(6, warm - by));
+        expect(cold.finish_minutes).not.toBeNull();
+        expect(planAt(warm, cold).finish_minutes).toBeLessThanOrEqual(cold.finish_minutes ?? 0);
       }),
       { numRuns: 8 },
     );
