@@ -10,6 +10,7 @@ const issue = (id: string, state: Issue['state']): Issue => ({
 const job = (...issues: Issue[]) => ({ id: 'j', number: '2026-001', title: 'Pier table', issues });
 const invoice = (open_minor: number) => ({
   ...{ id: 'i', jobId: null, number: '2026-7', issuedOn: '2026-01-02', dueOn: '2026-02-02' },
+  ...{ kind: 'invoice' as const, credited_minor: 0, isOverdue: false },
   ...{ due_minor: 100_00, open_minor, currency: 'EUR' },
 });
 
