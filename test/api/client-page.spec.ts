@@ -17,6 +17,7 @@ import type { ClientOverview } from '#shared/client-page/client-overview-schema'
 import type { ClientPrice } from '#shared/client-page/client-price-schema';
 import { askForClientSignIn, beginClientVisit } from '#shared/client-page/visits-endpoints';
 import { endpoints } from '#shared/endpoints';
+import { markIssue } from '#shared/estimates/issues-endpoints';
 import {
   acceptanceOf,
   clientOf,
@@ -29,6 +30,7 @@ import {
 } from './sample-client-visit';
 import { sampleEstimate } from './sample-estimate';
 import { startApi, type Api } from './start-api';
+import { markIssue } from '#shared/estimates/issues-endpoints';
 import type { Visitor } from './visitor';
 
 let api: Api;
@@ -309,10 +311,13 @@ describe('The page of an issue', () => {
     expect(await review([])).not.toBe(sha256);
   });
 
-  it('says of an issue that another took its place, which one', async () => {
+  it('says of an issue that another took its place, and which one once that was sent', async () => {
     const sample = await sampleIssue(api.ours, api);
     const visitor = await clientOf(api.ours, api, sample.issueId);
     const later = await issueOf(api.ours, api, sample.estimateId);
+    expect(await pageOf(visitor, sample.issueId)).toMatchObject({ issue: { state: 'replaced' }, replacedBy: null });
+    const body = { state: 'sent', day: api.clock.now().toISOString().slice(0, 10), note: '' };
+    await api.as('office').call(markIssue, { params: { issueId: later }, body });
     expect(await pageOf(visitor, sample.issueId)).toMatchObject({ issue: { state: 'replaced' }, replacedBy: later });
     expect((await pageOf(visitor, later)).issue).toMatchObject({ state: 'open', letter: 'B' });
   });

@@ -58,11 +58,12 @@ export function presentClientIssue(facts: ClientIssueFacts): ClientIssue {
   const { workshop, issue, frozen, mayChoose, all, decision, questions, today } = facts;
   const { job, row, snapshot } = issue;
   const summary = presentClientSummary(issue, { today, timeZone: workshop.timeZone, decision });
-  const ofEstimate = all.filter(({ estimate }) => estimate.id === issue.estimate.id);
+  const newest = all.find(({ estimate }) => estimate.id === issue.estimate.id)?.row.id;
   return {
     letterhead: presentClientLetterhead(workshop, snapshot.workshop.currency),
     issue: summary,
-    replacedBy: row.state === 'replaced' ? (ofEstimate[0]?.row.id ?? null) : null,
+    // The later one is named once it was sent.
+    replacedBy: row.state === 'replaced' && newest !== undefined && newest !== row.id ? newest : null,
     job: { id: job.id, ...snapshot.job },
     ...frozen,
     mayChoose,
