@@ -2,6 +2,7 @@ import type { Page } from 'playwright-core';
 import { giveAccess } from '#shared/agreements/accesses-endpoints';
 import { addDays } from '#shared/calendar/add-days';
 import { changeEstimate } from '#shared/estimates/estimates-endpoints';
+import { markIssue } from '#shared/estimates/issues-endpoints';
 import {
   acceptedIssue,
   issueOf,
@@ -137,6 +138,8 @@ it('leads from a replaced issue to the later one', async () => {
   const sample = await sampleIssue(walk.api.ours, walk.api);
   const { token } = await linkTo(walk.api.ours, walk.api, sample.issueId);
   const later = await issueOf(walk.api.ours, walk.api, sample.estimateId);
+  const day = walk.api.clock.now().toISOString().slice(0, 10);
+  await done(walk, markIssue, { params: { issueId: later }, body: { state: 'sent', day, note: '' } });
   const { page, see } = await clientAt(walk, `${walk.address}/client#${token}`);
   expect(page.url()).toContain(later);
   await page.goto(`${walk.address}/client/issues/${sample.issueId}`);
