@@ -1,5 +1,21 @@
-import type { AlternativeTally, AlternativeTotal } from '#shared/estimates/estimate-schema';
 import type { PricedFigures, WorkFigures } from '#shared/estimates/figures';
+
+/** What one way of doing the work takes: whole booklets, hours, working days and weeks. */
+export interface AlternativeTally {
+  readonly booklets: number;
+  readonly hours: number;
+  readonly workingDays: number;
+  readonly weeks: number;
+}
+
+/** An alternative by itself: its gross total and what it is more or less than the base, in minor units, and what it takes. */
+export interface AlternativeTotal {
+  readonly id: string;
+  readonly gross_minor: number;
+  readonly difference_minor: number;
+  /** Issues made before it was kept have none. */
+  readonly tally?: AlternativeTally | undefined;
+}
 
 /** What one way of doing the work takes: booklets whole, hours of carving and of gilding together at their likely value, days and weeks as the tally has them. */
 export function alternativeTally({ tally }: Pick<WorkFigures, 'tally'>): AlternativeTally {

@@ -89,7 +89,6 @@ export const alternativeTallySchema = z.strictObject({
   workingDays: z.number(),
   weeks: z.number(),
 });
-export type AlternativeTally = z.infer<typeof alternativeTallySchema>;
 
 /** An alternative by itself: its gross total and what it is more or less than the base, in minor units, and what it takes. */
 export const alternativeTotalSchema = z.strictObject({
@@ -99,7 +98,6 @@ export const alternativeTotalSchema = z.strictObject({
   /** Issues made before it was kept have none. */
   tally: alternativeTallySchema.optional(),
 });
-export type AlternativeTotal = z.infer<typeof alternativeTotalSchema>;
 
 /** Who else is at work on the estimate, and its version, so that a page knows when to read it again. */
 export const presenceSchema = z.strictObject({ version, others: z.array(z.string()), rateCardInForceId: identifier });

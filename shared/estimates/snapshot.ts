@@ -1,5 +1,5 @@
 import type { Choice, Draft } from '#shared/estimates/draft';
-import type { AlternativeTotal } from '#shared/estimates/estimate-schema';
+import type { AlternativeTotal } from '#shared/estimates/alternative-total';
 import type { Figures } from '#shared/estimates/figures';
 import type { LengthUnit } from '#shared/units/length-unit';
 import type { RateCard } from '#shared/rate-cards/rate-card';

@@ -30,7 +30,6 @@ import {
 } from './sample-client-visit';
 import { sampleEstimate } from './sample-estimate';
 import { startApi, type Api } from './start-api';
-import { markIssue } from '#shared/estimates/issues-endpoints';
 import type { Visitor } from './visitor';
 
 let api: Api;

@@ -1,7 +1,7 @@
 import { addDays } from '#shared/calendar/add-days';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import { draftInOrder } from '#shared/estimates/draft-in-order';
-import type { AlternativeTotal } from '#shared/estimates/estimate-schema';
+import type { AlternativeTotal } from '#shared/estimates/alternative-total';
 import type { Figures } from '#shared/estimates/figures';
 import type {
   Snapshot,

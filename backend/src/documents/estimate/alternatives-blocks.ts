@@ -1,4 +1,4 @@
-import type { AlternativeTotal } from '#shared/estimates/estimate-schema';
+import type { AlternativeTotal } from '#shared/estimates/alternative-total';
 import type { Alternative } from '#shared/estimates/settings';
 import { countUp } from '#shared/money/settled';
 import type { Block } from '../paper/flow';

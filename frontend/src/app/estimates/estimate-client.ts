@@ -1,7 +1,8 @@
 import { Injectable, inject } from '@angular/core';
 import type { AnswerOf, BodyOf } from '#shared/actor/endpoint';
 import type { Change } from '#shared/estimates/change-schema';
-import type { AlternativeTotal, CostedEstimate, KeptChanges } from '#shared/estimates/estimate-schema';
+import type { AlternativeTotal } from '#shared/estimates/alternative-total';
+import type { CostedEstimate, KeptChanges } from '#shared/estimates/estimate-schema';
 import {
   changeEstimate,
   readAlternatives,

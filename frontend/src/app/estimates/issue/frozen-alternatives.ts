@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import type { Alternative } from '#shared/estimates/settings';
 import { Formats } from '../../core/formats/formats';
-import type { AlternativeTotal } from '#shared/estimates/estimate-schema';
+import type { AlternativeTotal } from '#shared/estimates/alternative-total';
 
 /** The alternatives of an issue with what each comes to, as it was frozen. */
 @Component({

@@ -200,7 +200,7 @@ describe('The pages of issues', () => {
     });
 
     it('hears at once of a card that has just come into force, before it says that nothing stops it', async () => {
-      let answer = (_present: PresenceAnswer): void => undefined;
+      let answer: (present: PresenceAnswer) => void = () => undefined;
       const asked = () => new Promise<PresenceAnswer>((resolve) => (answer = resolve));
       (server as { presence: () => Promise<PresenceAnswer> }).presence = asked;
       await open(IssuePage);

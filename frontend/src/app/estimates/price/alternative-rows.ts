@@ -1,4 +1,4 @@
-import type { AlternativeTally } from '#shared/estimates/estimate-schema';
+import type { AlternativeTally } from '#shared/estimates/alternative-total';
 import type { Alternative } from '#shared/estimates/settings';
 import type { BaseTotal } from './alternative-totals';
 

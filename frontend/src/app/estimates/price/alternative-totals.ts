@@ -1,10 +1,9 @@
 import { Injectable, computed, inject, resource, signal } from '@angular/core';
 import { takeUntilDestroyed, toObservable } from '@angular/core/rxjs-interop';
 import { type Observable, debounceTime, forkJoin, map, of, switchMap } from 'rxjs';
-import { alternativeTally, alternativeTotal } from '#shared/estimates/alternative-total';
 import type { Choice, Draft } from '#shared/estimates/draft';
 import { type EstimateInput, estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
-import type { AlternativeTotal } from '#shared/estimates/estimate-schema';
+import { alternativeTally, alternativeTotal, type AlternativeTotal } from '#shared/estimates/alternative-total';
 import type { Figures, PricedFigures } from '#shared/estimates/figures';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { EstimateClient } from '../estimate-client';
