@@ -37,10 +37,10 @@ function placeFindings({ placeHolds, places }: ProgrammeRequest, items: readonly
 /** A step that is planned in portions says so once. */
 function portionFindings(items: readonly ProgrammeItem[]): Finding[] {
   const told = new Map<string, Finding>();
-  for (const { lotId, stepId, name, portions } of items) {
+  for (const { lotId, lot, stepId, name: step, portions } of items) {
     const key = `${lotId} ${String(portions)}`;
     if (portions < 2 || stepId === null || told.has(key)) continue;
-    told.set(key, { kind: 'note', code: 'programme-in-portions', values: { step: name, portions }, about: lotId });
+    told.set(key, { kind: 'note', code: 'programme-in-portions', values: { step, lot, portions }, about: lotId });
   }
   return [...told.values()];
 }

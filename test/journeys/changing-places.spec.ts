@@ -3,6 +3,7 @@ import { v7 as newId } from 'uuid';
 import type { Change } from '#shared/estimates/change-schema';
 import { changeEstimate } from '#shared/estimates/estimates-endpoints';
 import { sampleEstimate, sampleMember, type SampleEstimate } from '../api/sample-estimate';
+import { expectInTime } from './expect-in-time';
 import { Walk } from './walk';
 
 /** Pieces, members, zones and ornaments put in another order with a real pointer and by keys, and rows of a spreadsheet made members. */
@@ -71,20 +72,6 @@ const zonesOn = async (page: Page) => {
   const zones = await page.locator('app-zone-list .item').all();
   return Promise.all(zones.map((zone) => zone.getAttribute('aria-label')));
 };
-
-/** Reads until it is as it should be, ten seconds at most; what it came to then is what is judged. */
-async function inTime<T>(read: () => Promise<T>, wanted: T): Promise<T> {
-  for (let tries = 0; tries < 50; tries++) {
-    const present = await read();
-    if (JSON.stringify(present) === JSON.stringify(wanted)) return present;
-    await new Promise((resolve) => setTimeout(resolve, 200));
-  }
-  return read();
-}
-
-async function expectInTime<T>(read: () => Promise<T>, wanted: T): Promise<void> {
-  expect(await inTime(read, wanted)).toEqual(wanted);
-}
 
 it('drags a member past another and into another piece, and undo brings it back', async () => {
   const sample = await crowded();

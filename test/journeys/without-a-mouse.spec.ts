@@ -1,5 +1,6 @@
 import { sampleEstimate } from '../api/sample-estimate';
 import { password } from '../api/test-workshop';
+import { expectInTime } from './expect-in-time';
 import { Keyboard } from './keyboard';
 import { isTooWide } from './violations';
 import { Walk } from './walk';
@@ -13,9 +14,11 @@ afterAll(() => walk.end());
 
 const issuesOf = (estimateId: string) => walk.api.app.estimates.issues.ofEstimate(walk.api.ours.id, estimateId);
 
-async function memberOf(estimateId: string) {
+/** How many there are of the first member, and how long it is. */
+async function measuresOf(estimateId: string): Promise<unknown> {
   const { members } = await walk.api.app.estimates.drafts.whole(walk.api.ours.id, estimateId);
-  return members[0]?.content;
+  const { count, shape } = members[0]?.content ?? {};
+  return [count, shape && 'length_mm' in shape ? shape.length_mm : undefined];
 }
 
 it('by the keyboard alone', async () => {
@@ -36,7 +39,7 @@ it('by the keyboard alone', async () => {
   await keys.enter(/^How many/, '4');
   await keys.enter(/^Length/, '2000');
   await page.getByText(/^kept/).waitFor();
-  expect(await memberOf(estimateId)).toMatchObject({ count: 4, shape: { length_mm: 2000 } });
+  await expectInTime(() => measuresOf(estimateId), [4, 2000]);
   await see('journey keyboard measured');
   await keys.follow(/^Issue$/);
   await page.getByRole('button', { name: 'Issue A' }).waitFor();
@@ -66,7 +69,7 @@ it('by a thumb on a phone', async () => {
   await page.getByText(/^kept/).waitFor();
   await see('journey phone measured');
   await isNarrowEnough();
-  expect(await memberOf(estimateId)).toMatchObject({ count: 3, shape: { length_mm: 2000 } });
+  await expectInTime(() => measuresOf(estimateId), [3, 2000]);
   await page.getByRole('link', { name: /^Gild .*booklet/ }).tap();
   await page.getByRole('button', { name: 'Add a zone' }).waitFor();
   await isNarrowEnough();

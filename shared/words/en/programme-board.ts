@@ -16,7 +16,7 @@ export const programmeBoard = {
     '{lot} takes {amount, plural, one {one place} other {# places}} of {place}, and there {capacity, plural, one {is one} other {are #}}.',
   'programme-lot-fewer-may': 'At least the {crew, plural, one {one} other {#}} it takes.',
   'programme-in-portions':
-    '{step} and what follows it are planned in {portions, plural, one {# portion} other {# portions}}, so that each stays inside its time.',
+    '{step} ({lot}) and what follows it are planned in {portions, plural, one {# portion} other {# portions}}, so that each stays inside its time.',
   'programme-no-plan': 'There is no plan yet.',
   'programme-plan-broken': 'The plan breaks what the programme asks for. What it breaks is listed with it.',
   'programme-breaks-hours': '{task} stands where its people do not work, or where it cannot be done in one go.',

@@ -1,3 +1,4 @@
+import { NgTemplateOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import { RouterLink } from '@angular/router';
 import type { JournalInCurrency } from '#shared/invoices/payment-schema';
@@ -8,7 +9,7 @@ import { ledgerEntryNames, ledgerKindNames } from './invoice-names';
 /** Everything that moved an account in one currency, with the sums of each kind before it. */
 @Component({
   selector: 'app-journal-book',
-  imports: [RouterLink],
+  imports: [NgTemplateOutlet, RouterLink],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './journal-book.html',
   styleUrl: './journal-book.scss',

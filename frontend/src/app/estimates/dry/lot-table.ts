@@ -5,6 +5,7 @@ import type { FigureColumn } from '../../ui/table/figure-column';
 import { FigureTable } from '../../ui/table/figure-table';
 import { smallScreen } from '../../ui/screen/small-screen';
 import type { ShownLot } from './dry-lots';
+import { timeColumns } from './time-columns';
 import { waitingText } from './waiting-text';
 
 /** The lots with their hands-on and waiting time, and on which days they are in work. */
@@ -52,20 +53,11 @@ export class LotTable {
   });
 
   private times(): FigureColumn<ShownLot>[] {
-    return [
-      {
-        key: 'handsOn',
-        heading: $localize`Hands on`.replaceAll(' ', '\u00a0'),
-        kind: 'figure',
-        text: ({ handsOn_minutes }) => this.hours(handsOn_minutes),
-      },
-      {
-        key: 'waiting',
-        heading: $localize`Waiting`,
-        kind: 'figure',
-        text: ({ waiting_minutes }) => this.waiting(waiting_minutes),
-      },
-    ];
+    return timeColumns<ShownLot>(
+      this.formats,
+      ({ handsOn_minutes }) => this.hours(handsOn_minutes),
+      ({ waiting_minutes }) => waiting_minutes,
+    );
   }
 
   private inWork(): FigureColumn<ShownLot> {
@@ -74,12 +66,8 @@ export class LotTable {
 
   /** What the columns of a phone leave out. */
   private small({ handsOn_minutes, waiting_minutes }: ShownLot): string {
-    const [handsOn, waiting] = [this.hours(handsOn_minutes), this.waiting(waiting_minutes)];
+    const [handsOn, waiting] = [this.hours(handsOn_minutes), waitingText(this.formats, waiting_minutes)];
     return $localize`${handsOn}:hours: hands on, ${waiting}:time: waiting`;
-  }
-
-  private waiting(minutes: number): string {
-    return waitingText(this.formats, minutes);
   }
 
   private hours(minutes: number): string {

@@ -5,7 +5,7 @@ import { smallScreen } from '../../ui/screen/small-screen';
 import { FigureTable } from '../../ui/table/figure-table';
 import { EstimateStore } from '../estimate-store';
 import type { ShownLot } from './dry-lots';
-import { waitingText } from './waiting-text';
+import { timeColumns } from './time-columns';
 
 /** A zone with the hands it takes, and how long its lot waits. */
 interface ZoneTime {
@@ -54,18 +54,11 @@ export class ZoneTimes {
   protected readonly columns = computed<readonly FigureColumn<ZoneTime>[]>(() => [
     { key: 'name', heading: $localize`Zone`, kind: 'text', text: ({ name }) => name },
     ...(this.isSmall() ? [] : [this.lot()]),
-    {
-      key: 'handsOn',
-      heading: $localize`Hands on`.replaceAll(' ', '\u00a0'),
-      kind: 'figure',
-      text: ({ handsOn_hours }) => this.hours(handsOn_hours),
-    },
-    {
-      key: 'waiting',
-      heading: $localize`Waiting`,
-      kind: 'figure',
-      text: ({ waiting_minutes }) => waitingText(this.formats, waiting_minutes),
-    },
+    ...timeColumns<ZoneTime>(
+      this.formats,
+      ({ handsOn_hours }) => this.hours(handsOn_hours),
+      ({ waiting_minutes }) => waiting_minutes,
+    ),
   ]);
   protected readonly totals = computed((): Readonly<Record<string, string>> => {
     const hours = this.rows().reduce((sum, { handsOn_hours }) => sum + handsOn_hours, 0);

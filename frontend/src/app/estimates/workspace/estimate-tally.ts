@@ -64,9 +64,7 @@ export class EstimateTally {
       {
         name: $localize`Dry`,
         figure: $localize`${this.formats.number(tally.weeks, 1)}:weeks: weeks`,
-        minor:
-          this.readyBy() ??
-          $localize`${this.formats.number(tally.workingDays, 0)}:days: working days, one pair of hands a grade`,
+        minor: this.readyBy() ?? $localize`${this.formats.number(tally.workingDays, 0)}:days: working days`,
         route: this.route('dry'),
       },
     ];

@@ -47,41 +47,8 @@ import { ProgrammeStore } from './programme-store';
       </ul>
     </details>
   `,
+  styleUrl: './folded-list.scss',
   styles: `
-    :host {
-      display: grid;
-      gap: 4px;
-    }
-
-    summary {
-      min-height: 36px;
-      cursor: pointer;
-    }
-
-    h3 {
-      display: inline;
-      font-size: 1.125rem;
-      line-height: 1.5rem;
-    }
-
-    li {
-      display: flex;
-      flex-wrap: wrap;
-      gap: 4px 12px;
-      align-items: center;
-      padding: 6px 0;
-      border-top: 1px solid var(--line);
-    }
-
-    .name {
-      flex: 1 1 200px;
-    }
-
-    .name .muted {
-      display: block;
-      font-size: 0.9375rem;
-    }
-
     input {
       flex: none;
       width: 156px;

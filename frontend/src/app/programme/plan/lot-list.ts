@@ -47,47 +47,8 @@ import { workedLots, type WorkedLot } from './worked-lots';
       </ul>
     </details>
   `,
+  styleUrl: './folded-list.scss',
   styles: `
-    :host {
-      display: block;
-      min-width: 0;
-      scroll-margin-top: 80px;
-    }
-
-    summary {
-      min-height: var(--target);
-      line-height: var(--target);
-      cursor: pointer;
-    }
-
-    h3 {
-      display: inline;
-      font-size: 1.125rem;
-      line-height: 1.5rem;
-    }
-
-    li {
-      display: flex;
-      flex-wrap: wrap;
-      gap: 4px 16px;
-      align-items: center;
-      padding: 6px 0;
-      border-top: 1px solid var(--line);
-    }
-
-    .name {
-      flex: 1 1 240px;
-    }
-
-    .name .muted {
-      display: block;
-      font-size: 0.9375rem;
-    }
-
-    li button {
-      min-height: var(--target);
-    }
-
     app-lot-form {
       flex-basis: 100%;
     }
