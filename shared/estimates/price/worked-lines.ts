@@ -61,10 +61,8 @@ function gathered(input: PriceInput): Gathered[] {
 
 /** Members in the order of the estimate, what belongs to the job as a whole last; within a member in the order of the work. */
 function inOrder(places: readonly Gathered[], memberIds: readonly string[]): Gathered[] {
-  const placeOf = (memberId: string | null) => {
-    const place = memberIds.indexOf(memberId ?? '');
-    return place < 0 ? memberIds.length : place;
-  };
+  const ranks = new Map(memberIds.map((id, rank) => [id, rank]));
+  const placeOf = (memberId: string | null) => ranks.get(memberId ?? '') ?? memberIds.length;
   const general: readonly Gathered[] = places.filter((place) => place.memberId === null);
   const members = groupedBy(
     places
