@@ -1,3 +1,4 @@
+import { isBelowHalf } from '#shared/leaf/is-below-half';
 import { hasRoomForLaps, type LeafStep, piecesAlong } from '#shared/leaf/leaf-step';
 import { stripsFromLeaf } from '#shared/leaf/strips-from-leaf';
 import { settled } from '#shared/money/settled';
@@ -75,8 +76,7 @@ function cheapest(options: readonly LaysOption[], choice: LaysChoice): LaysOptio
 
 // Identical small pieces below half a leaf both ways are cut whole from it, without laps: floor(s/a)·floor(s/b) to a leaf.
 function smallPieces(run: MouldingRun, step: LeafStep): LaysLaying['small'] {
-  const isSmall = (size_mm: number) => size_mm > 0 && settled(2 * size_mm) < step.side_mm;
-  if (run.closedRun || !isSmall(run.girth_mm) || !isSmall(run.run_mm)) return null;
+  if (run.closedRun || !isBelowHalf(run.girth_mm, step.side_mm) || !isBelowHalf(run.run_mm, step.side_mm)) return null;
   return { across: stripsFromLeaf(step.side_mm, run.girth_mm), along: stripsFromLeaf(step.side_mm, run.run_mm) };
 }
 

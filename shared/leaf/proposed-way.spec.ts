@@ -6,11 +6,12 @@ import { shapeDefaults } from '#shared/measure/shape-defaults';
 import { surfaceOf } from '#shared/measure/surface-of';
 
 const leaf_mm = 80;
-const proposed = (shape: Shape, relief: Relief = 'flat', finish: SurfaceFinish = 'plain') =>
-  proposedWay({ surface: surfaceOf(shape), partKeys: null, relief, finish }, leaf_mm);
+const proposed = (shape: Shape, relief: Relief = 'flat', finish: SurfaceFinish = 'plain', members = 1) =>
+  proposedWay({ surface: surfaceOf(shape), partKeys: null, relief, finish, members }, leaf_mm);
 
 const panel = (length_mm: number, height_mm: number): Shape => ({ kind: 'rectangle', length_mm, height_mm });
 const moulding = shapeDefaults('moulding');
+const disc = (diameter_mm: number): Shape => ({ kind: 'circle', diameter_mm });
 const rim = (height_mm: number): Shape => ({
   kind: 'band',
   length: { by: 'tape', length_mm: 2000 },
@@ -37,6 +38,10 @@ describe('proposedWay', () => {
     ['a low rim in lays', proposed(rim(60)), 'lays'],
     ['a high rim in sheets', proposed(rim(400)), 'sheets'],
     ['a ball in patches', proposed(shapeDefaults('sphere')), 'patches'],
+    ['a disc below half a leaf, one of six, in lays', proposed(disc(39), 'flat', 'plain', 6), 'lays'],
+    ['one by itself in sheets', proposed(disc(39)), 'sheets'],
+    ['half a leaf wide in sheets', proposed(disc(40), 'flat', 'plain', 6), 'sheets'],
+    ['carved in patches', proposed(disc(39), 'low', 'carved', 6), 'patches'],
     ['a carved face drawn by its corners in patches', proposed(shapeDefaults('polygon'), 'low'), 'patches'],
   ])('%s', (_sentence, way, expected) => {
     expect(way).toBe(expected);

@@ -6,6 +6,7 @@ import { hasRoomForLaps, type LeafStep } from '#shared/leaf/leaf-step';
 import { patchesLaying } from '#shared/leaf/patches-laying';
 import { proposedWay } from '#shared/leaf/proposed-way';
 import { ribbonLaying } from '#shared/leaf/ribbon-laying';
+import { smallFace } from '#shared/leaf/small-face';
 import { sheetsLaying } from '#shared/leaf/sheets-laying';
 import type { ZoneLeafInput } from '#shared/leaf/zone-leaf-input';
 import type { Laying } from '#shared/leaf/laying';
@@ -63,15 +64,16 @@ function asPatches(job: Job): ZoneLaying {
 }
 
 function asLays(job: Job): ZoneLaying {
-  const { input, product, field } = job;
-  if (!field.moulding) {
+  const { input, product } = job;
+  const run = job.field.moulding ?? smallFace(input, product.side_mm);
+  if (!run) {
     const patched = asPatches(job);
     return { ...patched, findings: [tell(job, 'warn', { code: 'leaf-lays-need-run' }), ...patched.findings] };
   }
   const step = stepOf(job, 'lays');
   const strips = input.strips;
   const isTooNarrow = strips !== null && !allowedStrips(step).includes(strips);
-  const laying = laysLaying(field.moulding, step, {
+  const laying = laysLaying(run, step, {
     strips,
     fewestStrips: isCarved(input) ? 2 : 1,
     leafCost: Number(product.price) / product.leavesPerBooklet,

@@ -3,8 +3,10 @@ import { startLeaf } from '#shared/leaf/start-leaf';
 import { zoneLeaf } from '#shared/leaf/zone-leaf';
 import type { ZoneLeafInput } from '#shared/leaf/zone-leaf-input';
 import { finishes, reliefs } from '#shared/measure/relief';
+import type { Shape } from '#shared/measure/shape';
 import { startMeasure } from '#shared/measure/start-measure';
 import type { Surface } from '#shared/measure/surface';
+import { surfaceOf } from '#shared/measure/surface-of';
 import { en } from '#shared/words/en';
 import { say } from '#shared/words/say';
 
@@ -203,6 +205,54 @@ describe('zoneLeaf', () => {
     const band = { ...field, area_mm2: 771.2 * 40, courses: [{ length_mm: 771.2, height_mm: 40, closed: false }] };
     const narrow = laid({ surface: band, partKeys: null, way: 'lays', strips: 2, relief: 'flat', reliefFactor: 1 });
     expect(narrow.netLeaves).toBeCloseTo(5, 9);
+  });
+
+  describe('on small flat faces', () => {
+    const face = (shape: Shape, members: number, changed: Partial<ZoneLeafInput> = {}) => {
+      const plain = { relief: 'flat', reliefFactor: 1, finish: 'plain', partKeys: null } as const;
+      return laid({ ...plain, surface: surfaceOf(shape), members, ...changed });
+    };
+    const disc = (diameter_mm: number): Shape => ({ kind: 'circle', diameter_mm });
+
+    it('cuts four discs of 39 mm from a leaf of 80, nine of 26, a piece to lay each', () => {
+      expect(face(disc(39), 12)).toMatchObject({
+        way: 'lays',
+        netLeaves: 3,
+        laying: { small: { across: 2, along: 2 } },
+      });
+      expect(face(disc(26), 18).netLeaves).toBeCloseTo(2, 9);
+      expect(face(disc(39), 12).handled.likely).toBeCloseTo(4 * face(disc(39), 12).grossLeaves.likely, 9);
+    });
+
+    it('cuts ovals, triangles and drawn faces by the rectangle round them', () => {
+      expect(face({ kind: 'ellipse', length_mm: 38, height_mm: 25 }, 12).netLeaves).toBeCloseTo(2, 9);
+      expect(face({ kind: 'triangle', base_mm: 25, height_mm: 38 }, 12).netLeaves).toBeCloseTo(2, 9);
+      const lozenge = [
+        { x_mm: -19, y_mm: 0 },
+        { x_mm: 0, y_mm: -12 },
+        { x_mm: 19, y_mm: 0 },
+        { x_mm: 0, y_mm: 12 },
+      ];
+      expect(face({ kind: 'polygon', points: lozenge }, 12).netLeaves).toBeCloseTo(2, 9);
+    });
+
+    it('counts by area what has none like it, is half a leaf wide, or is laid as somebody chose', () => {
+      const byArea = (diameter_mm: number) => (Math.PI / 4) * (diameter_mm / 78) ** 2;
+      expect(face(disc(39), 1).way).toBe('sheets');
+      expect(face(disc(39), 1).netLeaves).toBeCloseTo(byArea(39), 9);
+      expect(face(disc(40), 12).netLeaves).toBeCloseTo(12 * byArea(40), 9);
+      expect(face(disc(39), 12, { way: 'sheets' }).netLeaves).toBeCloseTo(12 * byArea(39), 9);
+    });
+
+    it('never lays less leaf than a disc has surface', () => {
+      const size = fc.double({ min: 1, max: 90, noNaN: true });
+      fc.assert(
+        fc.property(size, fc.integer({ min: 1, max: 60 }), (diameter_mm, members) => {
+          const zone = face(disc(diameter_mm), members);
+          expect(zone.netLeaves * 6400).toBeGreaterThanOrEqual(zone.trueArea_mm2 * (1 - 2e-6));
+        }),
+      );
+    });
   });
 
   it('takes nothing for nothing', () => {

@@ -29,6 +29,8 @@ export interface Surface {
   /** Straight sides of the run, joined for laying and for planning carved repeats; one entry where the run is single. */
   readonly sides_mm: readonly number[];
   readonly parts: readonly SurfacePart[];
+  /** The rectangle round a flat face that has no run, so that small ones can be cut from a leaf. */
+  readonly bounds_mm?: { readonly length: number; readonly height: number };
   /** Fields laid by courses; empty for every other shape. */
   readonly courses: readonly Course[];
   /** How leaf is usually laid on its form; relief and width of a zone may propose another way. */
