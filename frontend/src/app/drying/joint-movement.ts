@@ -5,6 +5,7 @@ import type { DryingCard } from '#shared/drying/drying-card';
 import { woodMovement } from '#shared/drying/wood-movement';
 import { Formats } from '../core/formats/formats';
 import { documentForm } from '../core/forms/document-form';
+import { offeredIn } from '../measure';
 import { EntryAt, type EntryChoice } from '../ui/field/entry-at';
 import type { Explained } from '../ui/figure/explained';
 import { Figure } from '../ui/figure/figure';
@@ -90,6 +91,6 @@ export class JointMovement implements OnInit {
   ngOnInit(): void {
     const timberId = this.timbers().at(0)?.id ?? '';
     const joint: Joint = { width_mm: 100, timberId, cut: 'tangential', isGessoed: true };
-    this.form.reset(joint);
+    this.form.reset(offeredIn(this.formats.lengthUnit(), joint));
   }
 }

@@ -1,8 +1,10 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import type { BandLength, BandPart, BandShape } from '#shared/measure/band-shape';
 import type { AnyDocumentForm } from '../core/forms/document-form';
+import { Formats } from '../core/formats/formats';
 import { EntryAt } from '../ui/field/entry-at';
 import { ChoiceEntry } from './choice-entry';
+import { offeredIn } from './first-shape';
 import { type PickedKind, RowsEditor } from './rows-editor';
 import type { ShapeEntry } from './shape-entries';
 
@@ -25,6 +27,8 @@ const cells: Readonly<Record<BandPart['part'], readonly (ShapeEntry | undefined)
   templateUrl: './band-editor.html',
 })
 export class BandEditor {
+  private readonly formats = inject(Formats);
+
   readonly form = input.required<AnyDocumentForm>();
   /** Where the band stands in the document. */
   readonly path = input.required<string>();
@@ -51,19 +55,24 @@ export class BandEditor {
   protected change(by: string): void {
     const next: BandLength =
       by === 'tape' ? { by: 'tape', length_mm: 2000 } : { by: 'parts', parts: [straight, curve, straight, curve] };
-    this.form().put(this.at('length'), next);
+    this.form().put(this.at('length'), this.offered(next));
   }
 
   protected add(index: number): void {
-    this.form().insert(this.at('length.parts'), index, straight);
+    this.form().insert(this.at('length.parts'), index, this.offered(straight));
   }
 
   protected pick({ index, kind }: PickedKind): void {
-    this.form().put(this.at(`length.parts.${index}`), kind === 'curve' ? curve : straight);
+    this.form().put(this.at(`length.parts.${index}`), this.offered(kind === 'curve' ? curve : straight));
   }
 
   protected cut(isCut: boolean): void {
-    if (isCut) this.form().put(this.at('stretch_mm'), 700);
+    const { stretch_mm } = this.offered({ stretch_mm: 700 });
+    if (isCut) this.form().put(this.at('stretch_mm'), stretch_mm);
     else this.form().drop(this.at('stretch_mm'));
+  }
+
+  private offered<T>(value: T): T {
+    return offeredIn(this.formats.lengthUnit(), value);
   }
 }

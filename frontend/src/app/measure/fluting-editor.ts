@@ -1,7 +1,9 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import type { Fluting } from '#shared/measure/fluting';
 import type { AnyDocumentForm } from '../core/forms/document-form';
+import { Formats } from '../core/formats/formats';
 import { EntryAt } from '../ui/field/entry-at';
+import { offeredIn } from './first-shape';
 import type { ShapeEntry } from './shape-entries';
 
 const start: Fluting = { cut: 'flutes', width_mm: 8, depth_mm: 4, between_mm: 3, share_percent: 100 };
@@ -49,6 +51,8 @@ const entries: readonly ShapeEntry[] = [
   `,
 })
 export class FlutingEditor {
+  private readonly formats = inject(Formats);
+
   readonly form = input.required<AnyDocumentForm>();
   /** Where the shape stands in the document. */
   readonly path = input.required<string>();
@@ -58,7 +62,7 @@ export class FlutingEditor {
   protected readonly isFluted = computed(() => this.form().value<Fluting>(`${this.path()}.fluting`) !== undefined);
 
   protected turn(isFluted: boolean): void {
-    if (isFluted) this.form().put(`${this.path()}.fluting`, start);
+    if (isFluted) this.form().put(`${this.path()}.fluting`, offeredIn(this.formats.lengthUnit(), start));
     else this.form().drop(`${this.path()}.fluting`);
   }
 }

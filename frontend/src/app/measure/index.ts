@@ -1,5 +1,5 @@
 export { elementName } from './element-names';
-export { firstShape } from './first-shape';
+export { firstShape, offeredIn } from './first-shape';
 export { MemberPicture } from './member-picture';
 export { PartPicker } from './part-picker';
 export { finishNames, reliefNames } from './relief-names';

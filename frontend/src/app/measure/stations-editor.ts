@@ -1,7 +1,10 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import type { Corner } from '#shared/measure/flat-shape';
 import type { Station } from '#shared/measure/leg-shape';
+import type { LengthUnit } from '#shared/units/length-unit';
 import type { AnyDocumentForm } from '../core/forms/document-form';
+import { Formats } from '../core/formats/formats';
+import { offeredIn } from './first-shape';
 import { RowsEditor } from './rows-editor';
 import type { ShapeEntry } from './shape-entries';
 
@@ -13,13 +16,19 @@ interface ListWords {
   readonly headings: readonly string[];
   readonly cells: readonly ShapeEntry[];
   readonly least: number;
-  /** What follows the last rows. */
-  readonly next: (last: unknown, before: unknown) => unknown;
+  /** What follows the last rows, in round figures of a unit where nothing says how far. */
+  readonly next: (rows: readonly unknown[], unit: LengthUnit) => unknown;
 }
 
-const further = (last: unknown, before: unknown): Station => {
-  const [one, other] = [last as Station, before as Station | undefined];
-  return { at_mm: one.at_mm + (other ? one.at_mm - other.at_mm : 100), girth_mm: one.girth_mm };
+const further = (rows: readonly unknown[], unit: LengthUnit): Station => {
+  const [before, last] = [rows.at(-2) as Station | undefined, rows.at(-1) as Station];
+  const step_mm = before ? last.at_mm - before.at_mm : offeredIn(unit, { step_mm: 100 }).step_mm;
+  return { at_mm: last.at_mm + step_mm, girth_mm: last.girth_mm };
+};
+
+const cornerOn = (rows: readonly unknown[], unit: LengthUnit): Corner => {
+  const { x_mm, y_mm } = rows.at(-1) as Corner;
+  return { x_mm: x_mm - offeredIn(unit, { step_mm: 50 }).step_mm, y_mm };
 };
 
 const lists: Readonly<Record<StationsWay, ListWords>> = {
@@ -29,7 +38,7 @@ const lists: Readonly<Record<StationsWay, ListWords>> = {
     headings: [$localize`Girth`],
     cells: [{ path: '', label: $localize`Girth`, way: 'length' }],
     least: 3,
-    next: (last) => last,
+    next: (rows) => rows.at(-1),
   },
   stations: {
     caption: $localize`Girths where they were taken`,
@@ -51,10 +60,7 @@ const lists: Readonly<Record<StationsWay, ListWords>> = {
       { path: 'y_mm', label: $localize`Up`, way: 'displacement' },
     ],
     least: 3,
-    next: (last) => {
-      const { x_mm, y_mm } = last as Corner;
-      return { x_mm: x_mm - 50, y_mm };
-    },
+    next: cornerOn,
   },
 };
 
@@ -78,6 +84,8 @@ const lists: Readonly<Record<StationsWay, ListWords>> = {
   `,
 })
 export class StationsEditor {
+  private readonly formats = inject(Formats);
+
   readonly form = input.required<AnyDocumentForm>();
   /** Where the list stands in the document. */
   readonly path = input.required<string>();
@@ -93,7 +101,7 @@ export class StationsEditor {
   /** Equally spaced girths come in pairs, so that their number stays odd. */
   protected add(index: number): void {
     const rows = this.form().value<readonly unknown[]>(this.path()) ?? [];
-    const next = this.list().next(rows.at(-1), rows.at(-2));
+    const next = this.list().next(rows, this.formats.lengthUnit());
     this.form().insert(this.path(), index, next);
     if (this.way() === 'girths' && rows.length % 2 === 1) this.form().insert(this.path(), index + 1, next);
   }

@@ -1,8 +1,10 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import type { TwistedSection } from '#shared/measure/leg-shape';
 import type { AnyDocumentForm } from '../core/forms/document-form';
+import { Formats } from '../core/formats/formats';
 import { EntryAt } from '../ui/field/entry-at';
 import { ChoiceEntry } from './choice-entry';
+import { offeredIn } from './first-shape';
 import type { ShapeEntry } from './shape-entries';
 
 const starts: Readonly<Record<TwistedSection['outline'], TwistedSection>> = {
@@ -46,6 +48,8 @@ const entries: Readonly<Record<TwistedSection['outline'], readonly ShapeEntry[]>
   `,
 })
 export class TwistEditor {
+  private readonly formats = inject(Formats);
+
   readonly form = input.required<AnyDocumentForm>();
   /** Where the twisted member stands in the document. */
   readonly path = input.required<string>();
@@ -61,6 +65,7 @@ export class TwistEditor {
   protected readonly entries = computed(() => entries[this.outline()]);
 
   protected change(outline: string): void {
-    this.form().put(`${this.path()}.section`, starts[outline as TwistedSection['outline']]);
+    const start = starts[outline as TwistedSection['outline']];
+    this.form().put(`${this.path()}.section`, offeredIn(this.formats.lengthUnit(), start));
   }
 }

@@ -1,8 +1,9 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import type { ShapeKind } from '#shared/measure/shape';
+import { Formats } from '../../core/formats/formats';
 import { newId } from '../../core/new-id';
-import { ShapeForm } from '../../measure';
+import { offeredIn, ShapeForm } from '../../measure';
 import { EntryAt } from '../../ui/field/entry-at';
 import { Icon } from '../../ui/icon/icon';
 import type { MemberForm } from '../members/member-form';
@@ -18,6 +19,8 @@ const faces: readonly ShapeKind[] = ['rectangle', 'triangle', 'circle', 'ellipse
   styleUrl: './item-list.scss',
 })
 export class OpeningList {
+  private readonly formats = inject(Formats);
+
   readonly form = input.required<MemberForm>();
   readonly isDisabled = input(false);
 
@@ -25,7 +28,7 @@ export class OpeningList {
   protected readonly openings = computed(() => this.form().items('openings'));
 
   protected add(): void {
-    const shape = { kind: 'circle', diameter_mm: 60 };
+    const shape = offeredIn(this.formats.lengthUnit(), { kind: 'circle', diameter_mm: 60 });
     this.form().insert('openings', this.openings().length, { id: newId(), shape, count: 1 });
   }
 
