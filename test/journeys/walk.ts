@@ -9,7 +9,8 @@ import { password } from '../api/test-workshop';
 import { desk, type Screen } from './screens';
 
 const root = join(__dirname, '../..');
-const pictures = join(__dirname, 'screenshots');
+/** Pictures are kept for somebody who wants to look at them and says so (`PICTURES=1`): of a whole run nobody would. */
+const pictures = process.env['PICTURES'] ? join(__dirname, 'screenshots') : undefined;
 
 /** What keeps Chromium to itself: it asks nobody but us. */
 const quiet = [
@@ -27,7 +28,7 @@ export interface Person {
   readonly page: Page;
   readonly context: BrowserContext;
   readonly complaints: string[];
-  /** Keeps a picture of what they see. */
+  /** Keeps a picture of what they see, where pictures are wanted. */
   see(name: string): Promise<void>;
 }
 
@@ -48,7 +49,7 @@ export class Walk {
     const server = createServer(api.app.web.express);
     await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
     const browser = await chromium.launch({ executablePath: '/usr/bin/chromium', args: quiet });
-    mkdirSync(pictures, { recursive: true });
+    if (pictures) mkdirSync(pictures, { recursive: true });
     return new Walk(api, server, browser);
   }
 
@@ -80,7 +81,9 @@ export class Walk {
       if (message.type() === 'error') complaints.push(`${message.text()} ${message.location().url}`.trim());
     });
     page.on('pageerror', (error) => complaints.push(error.message));
-    const see = async (name: string) => void (await page.screenshot({ path: join(pictures, `${name}.png`) }));
+    const see = async (name: string) => {
+      if (pictures) await page.screenshot({ path: join(pictures, `${name}.png`) });
+    };
     return { page, context, complaints, see };
   }
 
