@@ -14,6 +14,7 @@ import { invoices } from './0050-invoices';
 import { takenBack } from './0051-taken-back';
 import { writtenOffBecause } from './0052-written-off-because';
 import { lettersAboutInvoices } from './0053-letters-about-invoices';
+import { severalMeasures } from './0054-several-measures';
 
 /** Every step of the schema, in the order in which they are taken. A step that was released is never changed. */
 export const migrations: readonly Migration[] = [
@@ -32,4 +33,5 @@ export const migrations: readonly Migration[] = [
   takenBack,
   writtenOffBecause,
   lettersAboutInvoices,
+  severalMeasures,
 ];

@@ -1,6 +1,7 @@
 import * as z from 'zod';
 import { workKinds } from '#shared/estimates/price/work-kind';
 import { taxCodes } from '#shared/money/tax-by-category';
+import { reasonSchema } from '#shared/words/reason-schema';
 
 const minor = z.int();
 
@@ -10,7 +11,12 @@ const clientLineSchema = z.strictObject({
   memberId: z.uuid().nullable(),
   kind: z.enum(workKinds),
   name: z.string().nullable(),
-  measured: z.strictObject({ quantity: z.string(), unit: z.string(), rule: z.string() }).nullable(),
+  measured: z
+    .strictObject({
+      ...{ quantity: z.string(), unit: z.string(), rule: z.string() },
+      measures: z.array(reasonSchema.pick({ code: true, values: true })),
+    })
+    .nullable(),
   price_minor: minor,
 });
 

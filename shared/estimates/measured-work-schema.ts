@@ -1,18 +1,29 @@
 import * as z from 'zod';
 import { paidFor, paidText, paidUnits, type MeasuredWork } from '#shared/estimates/price/measured-work';
 import { measuringRules } from '#shared/measure/paid-quantity';
+import { complain } from '#shared/problems/complaints-of';
 import { line } from '#shared/problems/entry-schema';
 
-const typedLength = z.strictObject({ text: line(40), mm: z.number().min(0).max(1e6) });
+const length = z.number().min(0).max(1e6).nullable();
+
+const workMeasureSchema = z.strictObject({
+  count: z.int().min(1).max(10_000),
+  length_mm: length,
+  girth_mm: length,
+  area_mm2: z.number().min(0).max(1e12).nullable(),
+  sides: z.union([z.literal(1), z.literal(2)]),
+  worth: z.number().min(0).max(100),
+});
+
+const mostMeasures = 40;
 
 /** What the quantity of a paid line is reckoned from. */
 export const measuredWorkSchema = z.strictObject({
   rule: z.enum(measuringRules),
-  length: typedLength.nullable(),
-  girth: typedLength.nullable(),
-  area: z.strictObject({ text: line(40), mm2: z.number().min(0).max(1e12) }).nullable(),
-  sides: z.union([z.literal(1), z.literal(2)]),
-  worth: z.number().min(0).max(100),
+  measures: z.array(workMeasureSchema).min(1).max(mostMeasures),
+  typed: z
+    .record(z.string().max(40), line(60))
+    .refine((typed) => Object.keys(typed).length <= 3 * mostMeasures, complain('entry-too-many', { maximum: 120 })),
 }) satisfies z.ZodType<MeasuredWork>;
 
 interface PaidLine {

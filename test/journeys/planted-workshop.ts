@@ -214,7 +214,7 @@ const fullMember = (content: MemberContent, at: number): MemberContent => ({
 
 const anyExtra = () => ({ id: newId(), name: 'x', taxCategoryId: '', memberId: null, alternativeId: null });
 
-const unmeasured = { length: null, girth: null, area: null, sides: 1, worth: 1 } as const;
+const unmeasured = { count: 1, length_mm: null, girth_mm: null, area_mm2: null, sides: 1, worth: 1 } as const;
 
 /** A line whose quantity of 2 m² is reckoned from what was measured. */
 const measuredExtra = (taxCategoryId: string, measured: MeasuredWork): ExtraLine => ({
@@ -233,9 +233,13 @@ const measuredExtra = (taxCategoryId: string, measured: MeasuredWork): ExtraLine
 const extrasOf = (taxCategoryId: string): ExtraLine[] => [
   { ...anyExtra(), taxCategoryId, kind: 'paid-quantity', rule: 'x', quantity: '2', unit: 'x', price: '3' },
   measuredExtra(taxCategoryId, {
-    ...{ ...unmeasured, rule: 'plain-area', length: { text: 'x', mm: 1000 }, girth: { text: 'x', mm: 2000 } },
+    rule: 'plain-area',
+    measures: [1, 3].map((count) => ({ ...unmeasured, count, length_mm: 500, girth_mm: 1000 })),
+    typed: { 'measures.0.length_mm': 'x', 'measures.0.girth_mm': 'x' },
   }),
-  measuredExtra(taxCategoryId, { ...unmeasured, rule: 'weighted', area: { text: 'x', mm2: 2_000_000 } }),
+  measuredExtra(taxCategoryId, {
+    ...{ rule: 'weighted', measures: [{ ...unmeasured, area_mm2: 2_000_000 }], typed: { 'measures.0.area_mm2': 'x' } },
+  }),
   { ...anyExtra(), taxCategoryId, kind: 'bought-in', cost: '10' },
 ];
 

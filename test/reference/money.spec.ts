@@ -1,7 +1,8 @@
-import { paidFor, paidText } from '#shared/estimates/price/measured-work';
+import { paidFor, paidText, type WorkMeasure } from '#shared/estimates/price/measured-work';
 import type { PriceInput } from '#shared/estimates/price/price-input';
 import { priceOf } from '#shared/estimates/price/price-of';
 import { inverseDistribution } from '#shared/estimates/risk/inverse-distribution';
+import type { MeasuringRule } from '#shared/measure/paid-quantity';
 import { cashRounding, cashStep } from '#shared/money/cash-rounding';
 import { D } from '#shared/money/decimal';
 import { lineAmount, type PricedQuantity } from '#shared/money/line-amount';
@@ -314,23 +315,21 @@ describe('three-point figures', () => {
 });
 
 describe('work paid by a measuring rule', () => {
-  const feet = (figure: number) => ({ text: `${figure} ft`, mm: figure * 304.8 });
-  const nothing = { length: null, girth: null, area: null, sides: 1, worth: 1 } as const;
+  const foot_mm = 304.8;
+  const paidBy = (rule: MeasuringRule, measure: Partial<WorkMeasure>) => {
+    const nothing = { count: 1, length_mm: null, girth_mm: null, area_mm2: null, sides: 1, worth: 1 } as const;
+    return paidFor({ rule, measures: [{ ...nothing, ...measure }], typed: {} });
+  };
 
   // A Key to Civil Architecture, 1774: four lengths of 12 ft × 3 in girth at 4 d a square foot.
   it('comes to 48 pence for four lengths of 12 ft at 3 in girth', () => {
-    const paid = paidFor({ ...nothing, rule: 'plain-area', length: feet(48), girth: feet(0.25) });
+    const paid = paidBy('plain-area', { count: 4, length_mm: 12 * foot_mm, girth_mm: foot_mm / 4 });
     expect(paid && lineAmount({ quantity: paidText(paid, 'ft²'), price: '4' }, 0)).toBe(48);
   });
 
   // White: 60 yd worth three times plain are paid as 180 yd; at 0.20 a yard that is 36.00.
   it('comes to three times the rate for special work worth three times the plain', () => {
-    const paid = paidFor({
-      ...nothing,
-      rule: 'weighted',
-      area: { text: 'as measured', mm2: 60 * 9 * 92_903.04 },
-      worth: 3,
-    });
+    const paid = paidBy('weighted', { area_mm2: 60 * 9 * foot_mm ** 2, worth: 3 });
     const yards = Number(paid && paidText(paid, 'ft²')) / 9;
     expect(lineAmount({ quantity: String(yards), price: '0.20' }, 2)).toBe(36_00);
   });

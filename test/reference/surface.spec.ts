@@ -191,15 +191,16 @@ describe('A rim unrolled (common practice, no source)', () => {
 
 describe('Measuring rules: quantities that are paid for', () => {
   it('M1: four lengths of 12 ft by 3 in at 4 d a square foot: 12 ft², 48 d, 4 s (A Key to Civil Architecture, 1774)', () => {
-    const lengths = Array.from({ length: 4 }, () => ({ length_mm: 12 * foot, girth_mm: 3 * inch }));
-    const quantity_ft2 = paidQuantity({ rule: 'plain-area', lengths }).quantity_mm2 / foot ** 2;
+    const measures = [{ count: 4, length_mm: 12 * foot, girth_mm: 3 * inch }];
+    const quantity_ft2 = paidQuantity({ rule: 'plain-area', measures }).quantity_mm2 / foot ** 2;
     expect(quantity_ft2).toBeCloseTo(12, 9);
     expect(quantity_ft2 * 4).toBeCloseTo(48, 9);
   });
 
   it('M2: carved work at 2.00 times, each side (IS 1200 Part 15)', () => {
-    expect(paidQuantity({ rule: 'carved-each-side', area_mm2: 5e5, sides: 1 }).quantity_mm2).toBe(1e6);
-    expect(paidQuantity({ rule: 'carved-each-side', area_mm2: 5e5, sides: 2 }).quantity_mm2).toBe(2e6);
+    const carved = (sides: 1 | 2) =>
+      paidQuantity({ rule: 'carved-each-side', measures: [{ count: 1, area_mm2: 5e5, sides }] }).quantity_mm2;
+    expect([carved(1), carved(2)]).toEqual([1e6, 2e6]);
   });
 
   // An Old Hand, Hints for Painters.
@@ -211,18 +212,18 @@ describe('Measuring rules: quantities that are paid for', () => {
     [12, 12],
     [14.5, 14.5],
   ])('M3: a member girthing %d in counts as %d in', (girth, paid) => {
-    const work = { rule: 'narrow-girth', length_mm: 10 * foot, girth_mm: girth * inch } as const;
-    expect(paidQuantity(work).quantity_mm2 / foot ** 2).toBeCloseTo((paid / 12) * 10, 9);
+    const measures = [{ count: 1, length_mm: 10 * foot, girth_mm: girth * inch }];
+    expect(paidQuantity({ rule: 'narrow-girth', measures }).quantity_mm2 / foot ** 2).toBeCloseTo((paid / 12) * 10, 9);
   });
 
   it('M4: 600 yd plain and 300 yd special at 0.20 come to 180.00 (White)', () => {
-    const areas = [600, 300].map((yards) => ({ area_mm2: yards * yard ** 2, worth: 1 }));
-    expect((paidQuantity({ rule: 'weighted', areas }).quantity_mm2 / yard ** 2) * 0.2).toBeCloseTo(180, 9);
+    const measures = [600, 300].map((yards) => ({ count: 1, area_mm2: yards * yard ** 2, worth: 1 }));
+    expect((paidQuantity({ rule: 'weighted', measures }).quantity_mm2 / yard ** 2) * 0.2).toBeCloseTo(180, 9);
   });
 
   it('M4: 60 yd worth three times plain add 120 yd (White)', () => {
-    const plain = { area_mm2: 60 * yard ** 2, worth: 1 };
-    const worked = paidQuantity({ rule: 'weighted', areas: [{ ...plain, worth: 3 }] });
+    const plain = { count: 1, area_mm2: 60 * yard ** 2, worth: 1 };
+    const worked = paidQuantity({ rule: 'weighted', measures: [{ ...plain, worth: 3 }] });
     expect((worked.quantity_mm2 - plain.area_mm2) / yard ** 2).toBeCloseTo(120, 9);
   });
 });

@@ -1,6 +1,9 @@
 import fc from 'fast-check';
 import type { Draft } from '#shared/estimates/draft';
+import { paidFor, paidText, type PaidUnit, type WorkMeasure } from '#shared/estimates/price/measured-work';
+import type { ExtraLine } from '#shared/estimates/settings';
 import type { Snapshot } from '#shared/estimates/snapshot';
+import { measuringRules } from '#shared/measure/paid-quantity';
 import { currencyDigits } from '#shared/money/currency-digits';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { startCard } from '#shared/rate-cards/start-card';
@@ -16,6 +19,39 @@ import { variedDraft } from '../documents/varied-draft';
  */
 
 jest.setTimeout(60_000);
+
+const measureOf = (count: number, measure: Partial<WorkMeasure>): WorkMeasure => ({
+  ...{ count, length_mm: null, girth_mm: null, area_mm2: null, sides: 1, worth: 1, ...measure },
+});
+
+/** A line by each measuring rule, each of several measures. */
+function measuredLines(unit: PaidUnit): readonly ExtraLine[] {
+  const lengths = [
+    measureOf(3, { length_mm: 2489.2, girth_mm: 76.2 }),
+    measureOf(2, { length_mm: 533.4, girth_mm: 152.4 }),
+    measureOf(1, { length_mm: 1016, girth_mm: 381 }),
+  ];
+  const areas = [
+    measureOf(4, { area_mm2: 123_456, sides: 2, worth: 3 }),
+    measureOf(1, { area_mm2: 70_000, worth: 1.5 }),
+  ];
+  const all = { 'plain-area': lengths, 'narrow-girth': lengths, 'carved-each-side': areas, weighted: areas };
+  return measuringRules.map((rule, place) => {
+    const measured = { rule, measures: all[rule], typed: {} };
+    const paid = paidFor(measured);
+    if (!paid) throw new RangeError('a measure is not whole');
+    return {
+      ...{
+        id: `measured-${place}`,
+        name: `Work ${place}`,
+        taxCategoryId: 'standard',
+        memberId: null,
+        alternativeId: null,
+      },
+      ...{ kind: 'paid-quantity', rule, quantity: paidText(paid, unit), unit, price: '81.37', measured },
+    };
+  });
+}
 
 const recalculation = async (snapshot: Snapshot): Promise<Recalculated> =>
   recalculated(await estimateWorkbook(snapshot));
@@ -112,10 +148,22 @@ const cases: readonly (readonly [string, Draft, Parameters<typeof sampleSnapshot
   ['in a currency without minor units', smallDraft(), { workshop: { currency: 'JPY' } }],
   ['in a currency of a thousand minor units', smallDraft(), { workshop: { currency: 'KWD' } }],
   ['of twelve members in three build-ups', longDraft(12), {}],
+  ['of measured work in square metres', smallDraft({ extras: measuredLines('m²') }), {}],
+  ['of measured work in square feet', smallDraft({ extras: measuredLines('ft²') }), {}],
   ['of nothing but settings', { ...smallDraft(), members: [] }, {}],
 ];
 
 describe('the workbook recalculated by another engine', () => {
+  it('reckons measured work from its measures: five narrow ones, one of them wider than 6 in', async () => {
+    const extras = measuredLines('ft²').filter((line) => line.kind === 'paid-quantity' && line.rule === 'narrow-girth');
+    const found = await recalculation(sampleSnapshot(smallDraft({ extras })));
+    // Own: 3 × 98 in by 6 in, 2 × 21 in by 12 in, 1 × 40 in by 15 in, in ft² of 144 in².
+    expect(found.at('Further lines', 'C4')).toBe(Number(((294 * 6 + 42 * 12 + 40 * 15) / 144).toFixed(4)));
+    expect(found.formulas.find(({ sheet, address }) => sheet === 'Further lines' && address === 'C4')?.formula).toMatch(
+      /^ROUND\(ROUND\(SUM\('Measured work'!/,
+    );
+  });
+
   it.each(cases)('comes to the same money for an estimate %s', async (_name, draft, at) => {
     const snapshot = sampleSnapshot(draft, at);
     const found = await recalculation(snapshot);

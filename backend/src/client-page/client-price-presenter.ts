@@ -3,17 +3,19 @@ import { paymentRows } from '#shared/documents/payment-rows';
 import { chosenDraft } from '#shared/estimates/chosen-draft';
 import type { Draft } from '#shared/estimates/draft';
 import type { PriceLine, PriceTax } from '#shared/estimates/price/price';
+import { measuresOf } from '#shared/estimates/price/measured-work';
 import type { Snapshot } from '#shared/estimates/snapshot';
 import { countUp } from '#shared/money/settled';
 
 type Line = ClientPrice['lines'][number];
 
-/** Of measured work the rule and the quantity it is paid by; nothing of what one of it costs. */
+/** Of measured work the rule and the quantity it is paid by, and its measures; nothing of what one of it costs. */
 function measuredOf(draft: Draft, id: string): Line['measured'] {
   const extra = draft.settings.extras.find((one) => one.id === id);
   if (extra?.kind !== 'paid-quantity') return null;
-  const { quantity, unit, rule } = extra;
-  return { quantity, unit, rule };
+  const { quantity, unit, rule, measured } = extra;
+  const measures = measured ? measuresOf(measured).map(({ code, values }) => ({ code, values })) : [];
+  return { quantity, unit, rule, measures };
 }
 
 const lineOf = (draft: Draft, { id, memberId, kind, name, price_minor }: PriceLine): Line => ({

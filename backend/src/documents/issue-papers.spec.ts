@@ -37,8 +37,18 @@ const extras: readonly ExtraLine[] = [
     kind: 'paid-quantity',
     rule: 'as measured',
     quantity: '3.5',
-    unit: 'm',
+    unit: 'm²',
     price: '84.00',
+    measured: {
+      rule: 'plain-area',
+      measures: [
+        [2, 1500],
+        [1, 500],
+      ].map(([count, length_mm]) => ({
+        ...{ count, length_mm, girth_mm: 1000, area_mm2: null, sides: 1, worth: 1 },
+      })),
+      typed: {},
+    },
   },
 ];
 
@@ -132,7 +142,7 @@ describe('the estimate as a paper', () => {
       ]),
     ];
     expect(amounts.filter((amount) => !text.includes(money(amount)))).toEqual([]);
-    expect(text).toContain('3.5 m, by the rule: as measured');
+    expect(text).toContain('3.5 m², by the rule: as measured (2 × 1500 mm by 1000 mm; 500 mm by 1000 mm)');
     const [alternative] = full.alternatives;
     expect(alternative.difference_minor).toBeLessThan(0);
     const weeks = Math.ceil(alternative.tally?.weeks ?? 0);

@@ -4,6 +4,7 @@ import { canonicalJson } from '#shared/estimates/canonical-json';
 import type { Snapshot } from '#shared/estimates/snapshot';
 import type { EstimateRow } from './estimate-model';
 import type { IssueRow } from './issue-model';
+import { upgradedSnapshot } from './upgraded-snapshot';
 import type { WholeEstimate } from './whole-estimate';
 
 /** A snapshot as it is kept: gzipped canonical JSON and the SHA-256 of that JSON. */
@@ -17,7 +18,7 @@ export function thawedSnapshot(row: Pick<IssueRow, 'snapshot' | 'sha256' | 'id'>
   const json = gunzipSync(row.snapshot);
   const found = createHash('sha256').update(json).digest('hex');
   if (found !== row.sha256) throw new Error(`issue ${row.id} is not what was frozen`);
-  return JSON.parse(json.toString('utf8')) as Snapshot;
+  return upgradedSnapshot(JSON.parse(json.toString('utf8')) as Snapshot);
 }
 
 /** A frozen estimate put as the tables would hold it, so that one presenter serves drafts and issues. */

@@ -3,27 +3,25 @@ import { D, type DecimalText } from '#shared/money/decimal';
 import { settled } from '#shared/money/settled';
 import { squareMillimetresPerSquareFoot } from '#shared/units/exact-factors';
 import type { LengthUnit } from '#shared/units/length-unit';
+import type { Reason } from '#shared/words/reason';
 
-/** A length or an area with its text as it was typed. */
-interface TypedLength {
-  readonly text: string;
-  readonly mm: number;
-}
-
-interface TypedArea {
-  readonly text: string;
-  readonly mm2: number;
-}
-
-/** What a quantity is reckoned from under a measuring rule; what its rule does not ask for may be anything. */
-export interface MeasuredWork {
-  readonly rule: MeasuringRule;
-  readonly length: TypedLength | null;
-  readonly girth: TypedLength | null;
-  readonly area: TypedArea | null;
+/** So many alike, measured once; what the rule does not ask for may be anything. */
+export interface WorkMeasure {
+  readonly count: number;
+  readonly length_mm: number | null;
+  readonly girth_mm: number | null;
+  readonly area_mm2: number | null;
   readonly sides: 1 | 2;
   /** How many times plain work it is worth. */
   readonly worth: number;
+}
+
+/** What a quantity is reckoned from: measures summed under one measuring rule. */
+export interface MeasuredWork {
+  readonly rule: MeasuringRule;
+  readonly measures: readonly WorkMeasure[];
+  /** Lengths and areas as they were typed, by the path of their entry. */
+  readonly typed: Readonly<Record<string, string>>;
 }
 
 /** The units a reckoned quantity is paid in. */
@@ -33,15 +31,25 @@ export type PaidUnit = (typeof paidUnits)[number];
 /** The unit a workshop's quantities are paid in, by its unit of length: ft² with inches, else m². */
 export const paidUnitOf = (lengthUnit: LengthUnit): PaidUnit => (lengthUnit === 'in' ? 'ft²' : 'm²');
 
-function workOf({ rule, length, girth, area, sides, worth }: MeasuredWork): PaidWork | null {
+/** Every measure with what the rule asks for; null while one of them lacks it. */
+function whole<T>(measures: readonly WorkMeasure[], read: (measure: WorkMeasure) => T | null): T[] | null {
+  const all = measures.map(read);
+  return all.length > 0 && all.every((one): one is T => one !== null) ? all : null;
+}
+
+const ofLength = ({ count, length_mm, girth_mm }: WorkMeasure) =>
+  length_mm === null || girth_mm === null ? null : { count, length_mm, girth_mm };
+
+const ofArea = ({ count, area_mm2, sides, worth }: WorkMeasure) =>
+  area_mm2 === null ? null : { count, area_mm2, sides, worth };
+
+function workOf({ rule, measures }: MeasuredWork): PaidWork | null {
   if (rule === 'plain-area' || rule === 'narrow-girth') {
-    if (length === null || girth === null) return null;
-    const measured = { length_mm: length.mm, girth_mm: girth.mm };
-    return rule === 'plain-area' ? { rule, lengths: [measured] } : { rule, ...measured };
+    const lengths = whole(measures, ofLength);
+    return lengths && { rule, measures: lengths };
   }
-  if (area === null) return null;
-  const area_mm2 = area.mm2;
-  return rule === 'weighted' ? { rule, areas: [{ area_mm2, worth }] } : { rule, area_mm2, sides };
+  const areas = whole(measures, ofArea);
+  return areas && { rule, measures: areas };
 }
 
 /** The quantity work is paid for in mm², explained; null while something its rule asks for is missing, RangeError for a negative figure. */
@@ -49,6 +57,9 @@ export function paidFor(measured: MeasuredWork): PaidQuantity | null {
   const work = workOf(measured);
   return work && paidQuantity(work);
 }
+
+/** Why a quantity is what it is, measure by measure. */
+export const measuresOf = (measured: MeasuredWork): readonly Reason[] => paidFor(measured)?.reasons.slice(0, -1) ?? [];
 
 /** A quantity in mm² as a line carries it: in m² or ft² to four decimals. */
 export function paidText({ quantity_mm2 }: Pick<PaidQuantity, 'quantity_mm2'>, unit: PaidUnit): DecimalText {

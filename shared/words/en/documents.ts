@@ -27,6 +27,7 @@ export const documents = {
   'paper-net': 'Net',
   'paper-tax': '{name}: {rate_percent} of {net_minor}',
   'paper-untaxed': '{name}, on {net_minor}',
+  'paper-measures': '{work} ({measures})',
   'paper-total': 'Total',
   'paper-total-with-tax': '{total_minor}, tax included',
 
@@ -207,6 +208,7 @@ export const documents = {
     'Figures on a tint are entered: developed areas, net leaves, hours of ornament, quantities of material, packs, rates. Everything else is a formula.',
   'sheet-about-flow': 'How it runs',
   'sheet-about-flow-text':
+  'sheet-measures': 'Measured work',
     'Take-off and Leaf lead to the hours of Gilding and Set-up, these with Carving to the lines of Price, at the Rates; Price leads to Stages. Net leaves, hours of ornament and quantities of material do not follow a changed area by themselves.',
   'sheet-about-rounding': 'Rounding',
   'sheet-about-rounding-text':
@@ -306,6 +308,8 @@ export const documents = {
   'sheet-tax-sum': 'Tax',
   'sheet-tax-lines': 'Lines',
   'sheet-tax-exact': 'Share of the discount',
+  'sheet-measures-note':
+    'What the quantities of measured work are reckoned from, each measure under the rule of its line. A quantity is their sum, to four decimals.',
   'sheet-tax-remainder': 'Remainder',
   'sheet-tax-part': 'Discount',
   'sheet-tax-taxed': 'Taxed',
@@ -377,6 +381,13 @@ export const documents = {
   'sheet-head-item': 'Bought for the job',
   'sheet-head-weight': 'Used',
   'sheet-head-remainder': 'Remainder',
+  'sheet-head-rule': 'Rule',
+  'sheet-head-length': 'Length, m',
+  'sheet-head-girth': 'Girth, m',
+  'sheet-head-paid-girth': 'Girth paid, m',
+  'sheet-head-area': 'Area, m²',
+  'sheet-head-times': 'Times',
+  'sheet-head-quantity': 'Quantity paid',
   'sheet-head-part': 'Part, {unit}',
   'sheet-head-kind': 'Kind',
   'sheet-head-price': 'Price, {currency}',

@@ -19,6 +19,7 @@ export const estimates = {
   'measuring-rule-narrow-girth': 'narrow members at a girth of 6 or 12 inches',
   'measuring-rule-weighted': '{worth} times plain work',
   'paid-quantity-differs': 'The quantity is not what its measures come to.',
+  'measuring-rule-weighted-each': 'special work, each at so many times plain',
   'alternative-empty':
     'The alternative “{name}” has nothing in it and leaves nothing out. It stays off the papers until it says what is done otherwise.',
   'alternatives-overlap':

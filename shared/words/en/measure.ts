@@ -79,10 +79,10 @@ export const measure = {
   'shape-fluting-too-deep': 'For this width the cut is at most {limit_mm} deep.',
 
   // Measuring rules: quantities that are paid for, never areas
-  'paid-plain': 'Length by girth',
-  'paid-carved-twice': 'Carved work is paid twice over, {sides, plural, one {one side} other {both sides}}',
-  'paid-girth-raised': 'Girth of {girth_mm} is paid as',
-  'paid-girth-as-measured': 'Girth is paid as measured',
-  'paid-weighted': '{area_mm2} at its worth of {worth}',
+  'paid-plain': '{count, plural, =1 {} other {# × }}{length_mm} by {girth_mm}',
+  'paid-carved-twice':
+    '{count, plural, =1 {} other {# × }}{area_mm2} carved, paid twice over, {sides, plural, one {one side} other {both sides}}',
+  'paid-girth-raised': '{count, plural, =1 {} other {# × }}{length_mm} by {girth_mm}, paid as {paid_mm}',
+  'paid-weighted': '{count, plural, =1 {} other {# × }}{area_mm2} at its worth of {worth, number}',
   'paid-quantity': 'Quantity paid for',
 } as const;

@@ -1,3 +1,5 @@
+import { measuredNote } from '#shared/documents/measured-note';
+import { measuresOf } from '#shared/estimates/price/measured-work';
 import type { PriceLine } from '#shared/estimates/price/price';
 import type { WorkKind } from '#shared/estimates/price/work-kind';
 import { printableText } from '#shared/words/printable-text';
@@ -10,12 +12,14 @@ export const kindName = ({ words }: IssueContent, kind: WorkKind): string => wor
 export const memberName = (content: IssueContent, id: string | null): string =>
   memberOf(content, id)?.name ?? content.words.say('paper-general-lines');
 
-/** The rule and the quantity a measured line is paid by; nothing of what one of it costs. */
+/** The rule and the quantity a measured line is paid by, and its measures. */
 export function lineNote({ draft, words }: IssueContent, line: PriceLine): string {
   const extra = draft.settings.extras.find((one) => one.id === line.id);
   if (extra?.kind !== 'paid-quantity') return '';
-  const { quantity, unit, rule } = extra;
-  return words.say('paper-measured-work', { quantity: words.figure('number', Number(quantity)), unit, rule });
+  const { unit, rule, measured } = extra;
+  const quantity = words.figure('number', Number(extra.quantity));
+  const measures = measured ? measuresOf(measured) : [];
+  return measuredNote({ quantity, unit, rule, measures }, (code, values) => words.say(code, values));
 }
 
 /** What stands under the name of a member: how many, in which timber, what is carved on it, how it is finished. */

@@ -9,6 +9,7 @@ import { goodsRates } from './goods-rates';
 import { leafPages } from './leaf-pages';
 import { materialsSheet } from './materials-sheet';
 import { moneyRates } from './money-rates';
+import { measuresSheet } from './measures-sheet';
 import { NameBook } from './name-book';
 import { priceSheet } from './price-sheet';
 import { programmeSheet } from './programme-sheet';
@@ -50,13 +51,25 @@ export function workbookPlan(snapshot: Snapshot): WorkbookPlan {
   const setUp = setUpSheet(facts, { gilding, takeOff, rates: gildingFigures });
   const materials = materialsSheet(facts, goods.materials, unit);
   const sharedOut = sharedOutSheet(facts, { leaf, materials }, unit);
-  const extras = extrasSheet(facts, unit);
+  const measures = measuresSheet(facts);
+  const extras = extrasSheet(facts, measures, unit);
   const price = priceSheet(facts, { carving, gilding, setUp, sharedOut, extras, money }, { names, unit });
-  const stages = stagesSheet(facts, price.gross);
+  // What takes away is given back at once: there is nothing to plan.
+  const stages = snapshot.figures.price.gross_minor < 0 ? [] : [stagesSheet(facts, price.gross)];
   const pages = [takeOff, leaf, carving, gilding, setUp, materials, sharedOut].map(({ sheet }) => sheet);
   const [about, booklets] = [aboutSheet(facts, unit), leaf.booklets];
   return {
-    sheets: [about, ...pages, extras.sheet, rates, price.sheet, stages, booklets, ...programmeSheet(facts)],
+    sheets: [
+      about,
+      ...pages,
+      ...measures.sheets,
+      extras.sheet,
+      rates,
+      price.sheet,
+      ...stages,
+      booklets,
+      ...programmeSheet(facts),
+    ],
     names,
   };
 }

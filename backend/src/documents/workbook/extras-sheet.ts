@@ -1,5 +1,6 @@
 import type { ExtraLine } from '#shared/estimates/settings';
 import { extraCells, type ExtraResult } from './extra-cells';
+import type { MeasuresPage } from './measures-sheet';
 import { formula, input, Sheet } from './sheet';
 import type { WorkbookFacts } from './workbook-facts';
 
@@ -23,12 +24,19 @@ interface Worked {
 
 const figureOr = (figure: number | undefined) => (figure === undefined ? null : input(figure));
 
-function extraRow(sheet: Sheet, extra: ExtraLine, facts: WorkbookFacts): Worked {
+interface ExtrasFrom {
+  readonly facts: WorkbookFacts;
+  readonly measures: MeasuresPage;
+}
+
+function extraRow(sheet: Sheet, extra: ExtraLine, { facts, measures }: ExtrasFrom): Worked {
   const cells = extraCells(extra, 10 ** facts.price.digits);
+  const quantity = measures.quantity(extra.id);
   const row = sheet.next;
   const here = (column: number) => sheet.here(column, row);
   sheet.add([
-    ...[extra.name, facts.words.say(`sheet-extra-${extra.kind}`), figureOr(cells.amount), cells.unit ?? null],
+    ...[extra.name, facts.words.say(`sheet-extra-${extra.kind}`)],
+    ...[quantity === null ? figureOr(cells.amount) : formula(quantity, cells.amount ?? 0), cells.unit ?? null],
     ...[figureOr(cells.price), figureOr(cells.percent)],
     formula(cells.result(here(at.amount), here(at.price), here(at.percent)), cells.value.toNumber()),
   ]);
@@ -36,7 +44,7 @@ function extraRow(sheet: Sheet, extra: ExtraLine, facts: WorkbookFacts): Worked 
 }
 
 /** Further lines: what each is worked from, in the order they were entered. */
-export function extrasSheet(facts: WorkbookFacts, unit: string): ExtrasPage {
+export function extrasSheet(facts: WorkbookFacts, measures: MeasuresPage, unit: string): ExtrasPage {
   const { words, price, snapshot } = facts;
   const column = (width: number, format = '') => ({ width, format });
   const figure = column(14, '#,##0.00####');
@@ -48,7 +56,7 @@ export function extrasSheet(facts: WorkbookFacts, unit: string): ExtrasPage {
     ...[words.say('sheet-head-unit'), words.say('sheet-head-price', { currency: snapshot.workshop.currency }), '%'],
     words.say('sheet-head-result', { unit }),
   ]);
-  const worked = new Map(price.extras.map((extra) => [extra.id, extraRow(sheet, extra, facts)]));
+  const worked = new Map(price.extras.map((extra) => [extra.id, extraRow(sheet, extra, { facts, measures })]));
   const of = (kind: ExtraResult) => (lineId: string) => {
     const found = worked.get(lineId);
     return found?.of === kind ? found.address : null;

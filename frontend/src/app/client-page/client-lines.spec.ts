@@ -51,10 +51,24 @@ describe('ClientLines', () => {
   it('says by what measured work is paid, and nothing of what one of it costs', async () => {
     const [line] = clientPrice(6_150_00).lines;
     if (!line) throw new Error('the sample lost its lines');
-    const measured = { quantity: '3.60', unit: 'm²', rule: 'girth by length' };
+    const measured = { quantity: '3.60', unit: 'm²', rule: 'girth by length', measures: [] };
     const widget = await open('members', { lines: [{ ...line, measured }] });
     expect(widget.element.querySelector('.note')?.textContent).toMatch(
       /3\.60? m².*girth by length|girth by length.*3\.60? m²/,
+    );
+  });
+
+  it('and the measures a quantity is the sum of', async () => {
+    const [line] = clientPrice(6_150_00).lines;
+    const values = (count: number, length_mm: number) => ({ count, length_mm, girth_mm: 80 });
+    const measures = [
+      { code: 'paid-plain' as const, values: values(3, 1200) },
+      { code: 'paid-plain' as const, values: values(1, 450) },
+    ];
+    const measured = { quantity: '0.324', unit: 'm²', rule: 'as measured', measures };
+    const widget = await open('members', { lines: [{ ...line, measured }] });
+    expect(spoken(widget.element.querySelector('.note') as Element)).toBe(
+      '0.324 m², by the rule: as measured (3 × 1200 mm by 80 mm; 450 mm by 80 mm)',
     );
   });
 });

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import type { ClientIssue } from '#shared/client-page/client-issue-schema';
 import type { ClientPrice } from '#shared/client-page/client-price-schema';
+import { measuredNote } from '#shared/documents/measured-note';
 import { sectionsByKind, sectionsByMember } from '#shared/estimates/price/price-sections';
 import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
@@ -65,10 +66,16 @@ export class ClientLines {
     const parts = head.lines.map((line) => ({
       id: line.id,
       name: line.name ?? nameOf(line),
-      note: line.measured ? this.words.say('paper-measured-work', line.measured) : '',
+      note: this.noteOf(line),
       price: this.formats.money(line.price_minor),
     }));
     return { id: head.id, name: head.name, price: this.formats.money(head.price_minor), parts };
+  }
+
+  private noteOf({ measured }: Line): string {
+    if (!measured) return '';
+    const quantity = this.formats.figure('number', Number(measured.quantity));
+    return measuredNote({ ...measured, quantity }, (code, values) => this.words.say(code, values));
   }
 
   private memberName(memberId: string | null): string {

@@ -10,16 +10,22 @@ import {
   untracked,
 } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
-import { FormControl, FormGroup, ReactiveFormsModule } from '@angular/forms';
-import { paidFor, paidText, paidUnitOf, type MeasuredWork } from '#shared/estimates/price/measured-work';
+import { canonicalJson } from '#shared/estimates/canonical-json';
+import { measuredWorkSchema } from '#shared/estimates/measured-work-schema';
+import {
+  paidFor,
+  paidText,
+  paidUnitOf,
+  type MeasuredWork,
+  type WorkMeasure,
+} from '#shared/estimates/price/measured-work';
 import { measuringRules, type MeasuringRule } from '#shared/measure/paid-quantity';
 import { Formats } from '../../core/formats/formats';
 import { Words } from '../../core/formats/words';
-import { AreaField } from '../../ui/field/area-field';
+import { documentForm } from '../../core/forms/document-form';
+import { RowsEditor, type ShapeEntry } from '../../measure';
 import { Entry } from '../../ui/field/entry';
 import { Field } from '../../ui/field/field';
-import { LengthField } from '../../ui/field/length-field';
-import { NumberField } from '../../ui/field/number-field';
 import { Figure } from '../../ui/figure/figure';
 
 /** What a line takes from its measures. */
@@ -39,50 +45,71 @@ const ruleNames: Readonly<Record<MeasuringRule, string>> = {
 
 const isRule = (text: string): text is MeasuringRule => (measuringRules as readonly string[]).includes(text);
 
-const nothing = {
-  rule: 'own' as MeasuringRule | 'own',
-  length: null,
-  girth: null,
-  area: null,
-  sides: 1,
-  worth: 1,
-} as const;
+const nothing: WorkMeasure = { count: 1, length_mm: null, girth_mm: null, area_mm2: null, sides: 1, worth: 1 };
 
-/** By which rule a quantity is paid, what it is measured from, and what it comes to, explained; `null` goes back to a rule of the workshop's own. */
+const count: ShapeEntry = { path: 'count', label: $localize`How many`, way: 'number' };
+const area: ShapeEntry = { path: 'area_mm2', label: $localize`Area measured flat`, way: 'area' };
+const lengths: readonly ShapeEntry[] = [
+  count,
+  { path: 'length_mm', label: $localize`Length measured`, way: 'length' },
+  { path: 'girth_mm', label: $localize`Girth measured`, way: 'length' },
+];
+const sides: ShapeEntry = {
+  path: 'sides',
+  label: $localize`Carved on`,
+  way: 'choice',
+  choices: [
+    { value: 1, label: $localize`one side` },
+    { value: 2, label: $localize`both sides` },
+  ],
+};
+
+/** What is measured by each rule. */
+const entries: Readonly<Record<MeasuringRule, readonly ShapeEntry[]>> = {
+  'plain-area': lengths,
+  'narrow-girth': lengths,
+  'carved-each-side': [count, area, sides],
+  weighted: [count, area, { path: 'worth', label: $localize`Times plain work`, way: 'number', unit: '×' }],
+};
+
+const written = (measured: MeasuredWork | null): string => (measured ? canonicalJson(measured) : '');
+
+/** By which rule a quantity is paid, the measures it is the sum of, and what it comes to, explained; `null` goes back to a rule of the workshop's own. */
 @Component({
   selector: 'app-measured-quantity',
-  imports: [AreaField, Entry, Field, Figure, LengthField, NumberField, ReactiveFormsModule],
+  imports: [Entry, Field, Figure, RowsEditor],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './measured-quantity.html',
   styles: `
-    :host,
-    .measures {
+    :host {
       display: contents;
+    }
+
+    .whole {
+      grid-column: 1 / -1;
     }
   `,
 })
 export class MeasuredQuantity {
   private readonly formats = inject(Formats);
   private readonly words = inject(Words);
+  private last = '';
 
   readonly measured = input.required<MeasuredWork | null>();
   readonly changed = output<Reckoned | null>();
 
   protected readonly rules = measuringRules.map((value) => ({ value, label: ruleNames[value] }));
-  protected readonly group = new FormGroup({
-    rule: new FormControl<MeasuringRule | 'own'>('own', { nonNullable: true }),
-    length: new FormControl<MeasuredWork['length']>(null),
-    girth: new FormControl<MeasuredWork['girth']>(null),
-    area: new FormControl<MeasuredWork['area']>(null),
-    sides: new FormControl<1 | 2>(1, { nonNullable: true }),
-    worth: new FormControl<number | null>(1),
+  protected readonly form = documentForm(measuredWorkSchema);
+  protected readonly rule = signal<MeasuringRule | null>(null);
+  protected readonly entries = computed(() => entries[this.rule() ?? 'plain-area']);
+  protected readonly headings = computed(() => this.entries().map(({ label }) => label));
+  protected readonly cells = computed(() => {
+    const cells = this.entries();
+    return () => cells;
   });
-  protected readonly rule = signal<MeasuringRule | 'own'>('own');
-  protected readonly takesLengths = computed(() => this.rule() === 'plain-area' || this.rule() === 'narrow-girth');
-  protected readonly takesArea = computed(() => this.rule() === 'carved-each-side' || this.rule() === 'weighted');
-  /** What the kept measures come to. */
+  /** What the measures come to; undefined while one of them is not whole. */
   protected readonly paid = computed(() => {
-    const measured = this.measured();
+    const measured = this.form.parsed();
     const paid = measured && paidFor(measured);
     if (!paid) return undefined;
     const text = this.formats.area(paid.quantity_mm2);
@@ -94,34 +121,47 @@ export class MeasuredQuantity {
       const measured = this.measured();
       untracked(() => this.show(measured));
     });
-    this.group.valueChanges.pipe(takeUntilDestroyed()).subscribe(() => this.take());
+    this.form.edited.pipe(takeUntilDestroyed()).subscribe(() => this.take());
   }
 
-  private show(measured: MeasuredWork | null): void {
-    // What is being entered is not whole yet, and stays.
-    if (!measured && this.group.dirty && this.rule() !== 'own') return;
-    this.group.reset(measured ?? nothing, { emitEvent: false });
-    this.rule.set(this.group.getRawValue().rule);
-  }
-
-  private take(): void {
-    const { rule, worth, ...measures } = this.group.getRawValue();
-    this.rule.set(rule);
-    if (!isRule(rule)) {
+  protected choose(value: string): void {
+    const before = this.rule();
+    if (!isRule(value)) {
+      this.rule.set(null);
       if (this.measured()) this.changed.emit(null);
       return;
     }
-    const figures = [measures.length?.mm, measures.girth?.mm, measures.area?.mm2, worth];
-    if (figures.some((figure) => figure !== undefined && !((figure ?? NaN) >= 0))) return;
-    this.reckon({ ...measures, rule, worth: worth ?? 1, sides: Number(measures.sides) === 2 ? 2 : 1 });
+    if (before === null) this.form.reset({ rule: value, measures: [nothing], typed: {} });
+    else this.form.put('rule', value);
+    this.rule.set(value);
   }
 
-  private reckon(measured: MeasuredWork): void {
-    const paid = paidFor(measured);
+  /** The next measure is mostly of the same girth, or carved and worth alike. */
+  protected add(index: number): void {
+    const last = this.form.value<WorkMeasure>(`measures.${index - 1}`);
+    this.form.insert('measures', index, { ...nothing, ...last, count: 1, length_mm: null, area_mm2: null });
+  }
+
+  // What is being entered is not whole yet, and stays; what somebody else or an undo changed is shown.
+  private show(measured: MeasuredWork | null): void {
+    if (written(measured) === this.last) return;
+    this.last = written(measured);
+    this.rule.set(measured?.rule ?? null);
+    if (measured) this.form.reset(measured);
+  }
+
+  private take(): void {
+    const measured = this.form.parsed();
+    const paid = measured && paidFor(measured);
     if (!paid) return;
+    this.last = written(measured);
     const unit = paidUnitOf(this.formats.lengthUnit());
-    const worth = this.formats.number(measured.worth);
-    const rule = this.words.say(`measuring-rule-${measured.rule}`, { worth });
-    this.changed.emit({ measured, rule, quantity: paidText(paid, unit), unit });
+    this.changed.emit({ measured, rule: this.ruleText(measured), quantity: paidText(paid, unit), unit });
+  }
+
+  private ruleText({ rule, measures }: MeasuredWork): string {
+    const worths = new Set(measures.map(({ worth }) => worth));
+    if (rule === 'weighted' && worths.size > 1) return this.words.say('measuring-rule-weighted-each');
+    return this.words.say(`measuring-rule-${rule}`, { worth: this.formats.number([...worths][0]) });
   }
 }

@@ -299,16 +299,55 @@ describe('PricePage', () => {
       // An Old Hand, Hints for Painters: 4 in counts as 6; 3.048 × 0.1524 m.
       expect(server.settings.extras[0]).toMatchObject({
         ...{ rule: 'narrow members at a girth of 6 or 12 inches', quantity: '0.4645', unit: 'm²' },
-        measured: { rule: 'narrow-girth', length: { mm: 3048 }, girth: { text: '4 in', mm: 101.6 } },
+        measured: {
+          ...{ rule: 'narrow-girth', measures: [{ count: 1, length_mm: 3048, girth_mm: 101.6 }] },
+          typed: { 'measures.0.length_mm': '3048 mm', 'measures.0.girth_mm': '4 in' },
+        },
       });
       element().querySelector<HTMLElement>('app-measured-quantity app-figure button')?.click();
       await settle();
-      expect(spoken(element().querySelector('app-reason-panel'))).toContain('is paid as');
+      expect(spoken(element().querySelector('app-reason-panel'))).toContain('paid as');
       await choose('Measured by', 'own');
       await type('Quantity', '7');
       await settle(700);
       expect(server.settings.extras[0]).toMatchObject({ quantity: '7' });
       expect(server.settings.extras[0]).not.toHaveProperty('measured');
+    });
+
+    it('from several measures added under one rule, so many alike as so many', async () => {
+      await open('extras');
+      button('Measured work').click();
+      await settle();
+      await choose('Measured by', 'plain-area');
+      await type('How many', '3');
+      await type('Length measured', '8 ft 2 in');
+      await type('Girth measured', '3 in');
+      await settle(700);
+      button('Another measure').click();
+      await settle(700);
+      // The second is not whole yet: what was reckoned stays, and nothing is shown for the whole.
+      expect(server.settings.extras[0]).toMatchObject({ quantity: '0.569' });
+      expect(spoken(element().querySelector('app-measured-quantity'))).toContain('Enter what was measured');
+      const second = [...element().querySelectorAll<HTMLInputElement>('app-measured-quantity tr[data-row="1"] input')];
+      expect(second.map(({ value }) => value)).toEqual(['1', '', '76.2']);
+      for (const [place, text] of [
+        [0, '2'],
+        [1, '1 ft 9 in'],
+      ] as const) {
+        second[place].value = text;
+        second[place].dispatchEvent(new Event('input'));
+      }
+      await settle(700);
+      // Own: 3 × 98 in and 2 × 21 in by 3 in are 1,008 in².
+      expect(server.settings.extras[0]).toMatchObject({
+        quantity: '0.6503',
+        measured: {
+          measures: [
+            { count: 3, length_mm: 2489.2 },
+            { count: 2, length_mm: 533.4, girth_mm: 76.2 },
+          ],
+        },
+      });
     });
 
     it('and a figure typed over a reckoned quantity stands by itself', async () => {
