@@ -34,6 +34,10 @@ import { ProblemError } from '../core/problems/problem-error';
     }
   `,
   styles: `
+    :host:empty {
+      display: none;
+    }
+
     li {
       display: grid;
       gap: 4px;

@@ -38,6 +38,11 @@ import { answerFormSchema } from './answer-form';
       </section>
     }
   `,
+  styles: `
+    :host:empty {
+      display: none;
+    }
+  `,
 })
 export class JobThread {
   private readonly calls = inject(AgreementCalls);

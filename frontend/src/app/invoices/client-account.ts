@@ -61,6 +61,7 @@ import { StandingMark } from './standing-mark';
     }
 
     .sum {
+      max-width: none;
       border: 0;
       font-weight: 500;
     }

@@ -31,6 +31,8 @@ import { newInvoiceSchema } from './new-invoice-schema';
         <app-client-field
           i18n-label
           label="Client"
+          i18n-placeholder
+          placeholder="Begin to type a name"
           mayEnter
           formControlName="clientId"
           [complaint]="form.message('clientId')"

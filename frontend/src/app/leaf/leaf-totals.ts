@@ -76,7 +76,7 @@ export class LeafTotals {
         heading: $localize`Leaf ÷ surface`,
         kind: 'figure',
         text: ({ coverage }) => this.formats.number(coverage.grossToNet, 2, 2),
-        minor: ({ coverage }) => $localize`${this.formats.number(coverage.loss_percent, 0)}:loss: % lost, lapped`,
+        minor: ({ coverage }) => $localize`${this.formats.percent(coverage.loss_percent, 0)}:loss: lost, lapped`,
       },
       {
         key: 'each',

@@ -44,6 +44,10 @@ const viewNames: Readonly<Record<DrawingView['view'], string>> = {
       flex: 0 1 150px;
     }
 
+    .slim:only-child {
+      flex-grow: 1;
+    }
+
     figcaption {
       font-size: 0.9375rem;
     }

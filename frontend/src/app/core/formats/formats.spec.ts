@@ -34,6 +34,15 @@ describe('Formats', () => {
     expect(plain(formats.signed(-1_144, money))).toBe(plain(formats.money(-1_144)));
   });
 
+  it.each([
+    ['en-IE', '18.0%', '100%'],
+    ['de-DE', '18,0 %', '100 %'],
+  ])('writes shares of a hundred with the sign of %s', (locale, ...expected) => {
+    signIn(['owner'], { locale });
+    const formats = TestBed.inject(Formats);
+    expect([formats.percent(18, 1, 1), formats.percent(99.6, 0)].map(plain)).toEqual(expected);
+  });
+
   it('shows the unit a workshop does not use beside the one it does', () => {
     signIn(['owner'], { lengthUnit: 'mm' });
     const formats = TestBed.inject(Formats);

@@ -95,6 +95,13 @@ export class Formats {
     return trueMinus(new Intl.NumberFormat(this.locale(), { numberingSystem: 'latn', ...digits }).format(figure + 0));
   }
 
+  /** A share of a hundred with its sign as the locale has it, with at most and at least so many decimals. */
+  percent(figure_percent: number, most = 2, least = 0): string {
+    const options = { style: 'percent', minimumFractionDigits: least, maximumFractionDigits: most } as const;
+    const format = new Intl.NumberFormat(this.locale(), { numberingSystem: 'latn', ...options });
+    return trueMinus(format.format(figure_percent / 100));
+  }
+
   /** What something is more or less by: its sign directly before the size as `write` has it; nothing is written without one. */
   signed(difference: number, write: (size: number) => string): string {
     const sign = difference > 0 ? '+' : difference < 0 ? '−' : '';

@@ -39,7 +39,7 @@ const choices: Readonly<Record<'issued' | 'sent', readonly IssueMark['state'][]>
       </app-field>
       <app-form-complaint [texts]="form.general()" />
       <div class="actions">
-        <button matButton="filled" type="submit" [disabled]="form.isSending()" i18n>Mark it</button>
+        <button matButton="outlined" type="submit" [disabled]="form.isSending()" i18n>Mark it</button>
       </div>
     </form>
   `,

@@ -54,6 +54,6 @@ export class MoneyBar {
     const net_minor = this.net_minor();
     if (net_minor <= 0) return '';
     const share_percent = new D(amount_minor).div(net_minor).times(100).toNumber();
-    return $localize`${this.formats.number(share_percent, 1, 1)}:share: %`;
+    return this.formats.percent(share_percent, 1, 1);
   }
 }

@@ -79,7 +79,7 @@ export class EstimateTally {
       {
         name: $localize`Price`,
         figure: this.formats.wholeMoney(priced.price.net_minor),
-        minor: margin === undefined ? '' : $localize`${this.formats.number(margin, 1)}:margin: % margin`,
+        minor: margin === undefined ? '' : $localize`${this.formats.percent(margin, 1)}:margin: margin`,
         route: this.route('price'),
         isPending: this.store.isPricePending(),
       },

@@ -53,7 +53,7 @@ describe('BenchPage', () => {
     await open(() => dayOf({ tasks: [task('a'), begun] }));
     expect(spoken(current().querySelector('h2'))).toBe('Lay');
     expect(spoken(current().querySelector('.closes'))).toBe('Window open until 12:00');
-    expect(current().querySelector('.window')?.getAttribute('aria-label')).toBe('25 % of the window is over');
+    expect(current().querySelector('.window')?.getAttribute('aria-label')).toBe('25% of the window is over');
     expect([...element().querySelectorAll('.list .what > :first-child')].map(spoken)).toEqual(['Burnish']);
   });
 
@@ -118,5 +118,12 @@ describe('BenchPage', () => {
   it('tells somebody nobody has named yet how they come to have a day', async () => {
     await open(() => dayOf({ person: null }));
     expect(spoken(element().querySelector('app-empty-state'))).toContain('Nobody at the bench has your name yet');
+  });
+
+  it('asks whose day is meant, where somebody sees several and has none of their own', async () => {
+    const people = ['Jonah', 'Tobias'].map((name) => ({ id: name, name }));
+    await open(() => dayOf({ person: null, people }));
+    expect(spoken(element().querySelector('app-empty-state'))).toContain('Whose day is it to be?');
+    expect(element().querySelector('select')?.selectedOptions[0]?.textContent).toContain('Choose somebody');
   });
 });

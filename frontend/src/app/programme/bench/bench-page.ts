@@ -30,6 +30,19 @@ import { windowBar } from './window-bar';
 
 const minute_ms = 60_000;
 
+const nothingToDo = {
+  heading: $localize`Nothing more to do this day`,
+  text: $localize`What is planned for you stands here, in order, with the windows that close.`,
+};
+const nobodyKnown = {
+  heading: $localize`Nobody at the bench has your name yet`,
+  text: $localize`Under Programme, Workshop the owner says which person of the workshop you are; then your work stands here.`,
+};
+const nobodyChosen = {
+  heading: $localize`Whose day is it to be?`,
+  text: $localize`Choose somebody above. If you work at the bench yourself, the page Workshop under Programme says who you are there; then your own day opens here.`,
+};
+
 /** One thing at a time: what is now or next with its window, then the list of the day. Nothing of cost. */
 @Component({
   selector: 'app-bench-page',
@@ -107,19 +120,13 @@ export class BenchPage {
     return $localize`Window open until ${closes}:time:`;
   });
   protected readonly windowLabel = computed(() => {
-    const over = this.formats.number(this.bar()?.over_percent ?? 0, 0);
-    return $localize`${over}:percent: % of the window is over`;
+    const over = this.formats.percent(this.bar()?.over_percent ?? 0, 0);
+    return $localize`${over}:percent: of the window is over`;
   });
-  protected readonly nothing = computed(() =>
-    this.shown()?.person === null
-      ? $localize`Nobody at the bench has your name yet`
-      : $localize`Nothing more to do this day`,
-  );
-  protected readonly nothingMore = computed(() =>
-    this.shown()?.person === null
-      ? $localize`Under Programme, Workshop the owner says which person of the workshop you are; then your work stands here.`
-      : $localize`What is planned for you stands here, in order, with the windows that close.`,
-  );
+  protected readonly empty = computed(() => {
+    if (this.shown()?.person) return nothingToDo;
+    return this.people().length > 1 ? nobodyChosen : nobodyKnown;
+  });
 
   constructor() {
     const turning = setInterval(() => this.now.set(this.clock()), minute_ms);

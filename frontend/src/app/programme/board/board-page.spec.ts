@@ -76,7 +76,7 @@ describe('BoardPage', () => {
         ],
       }),
     );
-    expect([...element().querySelectorAll('app-load-table td')].map(spoken)).toEqual(['50 %', '125 %']);
+    expect([...element().querySelectorAll('app-load-table td')].map(spoken)).toEqual(['50%', '125%']);
     expect(spoken(element().querySelector('.over-list'))).toBe(
       'Gilder, week of 11 Jan: 50 h of work, and 40 h there are.',
     );

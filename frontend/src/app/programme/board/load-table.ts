@@ -134,7 +134,7 @@ export class LoadTable {
     const share = there > 0 ? work / there : work > 0 ? 1 : 0;
     return {
       ...{ week, isOver: load?.isOver ?? false, full: Math.min(1, share).toFixed(2) },
-      text: work === 0 ? '–' : there === 0 ? this.hours(work) : `${this.formats.number(share * 100, 0)} %`,
+      text: work === 0 ? '–' : there === 0 ? this.hours(work) : this.formats.percent(share * 100, 0),
       hours: $localize`${this.hours(work)}:work: of ${this.hours(there)}:hours:`,
     };
   }

@@ -7,10 +7,12 @@ import { ChangeDetectionStrategy, Component, input } from '@angular/core';
   template: `
     <div class="names">
       <h1>{{ heading() }}</h1>
-      @if (about()) {
-        <p class="muted">{{ about() }}</p>
-      }
-      <ng-content select="[marks]" />
+      <div class="beside">
+        @if (about()) {
+          <p class="muted">{{ about() }}</p>
+        }
+        <ng-content select="[marks]" />
+      </div>
     </div>
     <div class="end no-print"><ng-content /></div>
   `,
@@ -33,6 +35,18 @@ import { ChangeDetectionStrategy, Component, input } from '@angular/core';
       flex: 1 1 300px;
       align-items: baseline;
       min-width: 0;
+    }
+
+    // What the page is about and its marks go to the next line together.
+    .beside {
+      display: flex;
+      flex-wrap: wrap;
+      gap: 4px 16px;
+      align-items: baseline;
+    }
+
+    .beside:empty {
+      display: none;
     }
 
     h1 {

@@ -7,7 +7,7 @@ import type { TallyCell } from './tally-cell';
 
 const cells: readonly TallyCell[] = [
   { name: 'Measure', figure: '2.69 m²', minor: '37 members', route: '/measure' },
-  { name: 'Price', figure: '€23,320', minor: '18 % margin', route: '/price', isPending: true },
+  { name: 'Price', figure: '€23,320', minor: '18% margin', route: '/price', isPending: true },
 ];
 
 @Component({
