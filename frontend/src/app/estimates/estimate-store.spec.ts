@@ -237,6 +237,23 @@ describe('EstimateStore', () => {
       expect(server.member(ids.leg)?.name).toBe('Still here');
     });
 
+    it('puts nothing back by an answer that was overtaken by what was kept meanwhile', async () => {
+      await open();
+      const overtaken = server.read();
+      const reading = jest
+        .spyOn(server, 'read')
+        .mockReturnValueOnce(new Promise((go) => setTimeout(go, 1000, overtaken)));
+      const read = store.reload();
+      rename(ids.edge, 'Rim');
+      await wait(900);
+      expect(server.member(ids.edge)?.name).toBe('Rim');
+      await wait(200);
+      await read;
+      expect(store.members().map((one) => one.name)).toEqual(['Rim', 'Leg']);
+      expect(store.head()?.version).toBe(2);
+      expect(reading).toHaveBeenCalledTimes(2);
+    });
+
     it('brings their other changes along after one’s own were kept', async () => {
       await open();
       server.changeElsewhere(ids.leg, { name: 'Leg, turned' });

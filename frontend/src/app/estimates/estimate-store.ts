@@ -12,7 +12,6 @@ import { DraftStore } from './draft/draft-store';
 import type { Edit } from './draft/edit';
 import type { ReadEstimate, ReaderSettings } from './draft/read-estimate';
 import type { Undone } from './draft/undo-history';
-import { UnfinishedEntries } from './draft/unfinished-entries';
 import { EstimateClient } from './estimate-client';
 import { LiveFigures } from './figures/live-figures';
 import { asCosted, asPriced } from './figures/as-priced';
@@ -29,7 +28,6 @@ export class EstimateStore {
   private readonly notices = inject(Notices);
   private readonly rows = inject(DraftStore);
   private readonly saving = inject(DraftSaving);
-  private readonly unfinished = inject(UnfinishedEntries);
   private readonly live = inject(LiveFigures);
   private readonly presence = inject(Presence);
   private readonly opened = signal<OpenEstimate | undefined>(undefined);
@@ -152,13 +150,6 @@ export class EstimateStore {
     return this.told(this.rows.undo(this.known()?.rateCardId));
   }
 
-  /** Gives up what could not be kept of a member, if there is any: one sees again what is kept. */
-  giveUpUnfinished(id: string): boolean {
-    const isUnfinished = this.unfinished.ids().has(id);
-    this.unfinished.forget(id);
-    return isUnfinished;
-  }
-
   redo(): readonly string[] {
     return this.told(this.rows.redo(this.known()?.rateCardId));
   }
@@ -204,9 +195,17 @@ export class EstimateStore {
     this.workOn(rateCardId).catch((error: unknown) => this.notices.complain((error as Error).message));
   }
 
+  /** An answer overtaken on its way by what was kept meanwhile would put old entries back: it is asked for again. */
   private async read(): Promise<void> {
-    const opened = this.opened();
-    if (opened) this.take(await this.client.read(opened.estimateId));
+    const estimateId = this.opened()?.estimateId;
+    const read = estimateId && (await this.client.read(estimateId));
+    if (read && this.isOvertaken(read)) await this.read();
+    else if (read) this.take(read);
+  }
+
+  private isOvertaken({ id, version }: EstimateHead): boolean {
+    const known = this.known();
+    return known?.id === id && version < known.version;
   }
 
   private take(read: ReadEstimate): void {

@@ -16,8 +16,10 @@ export class UnfinishedEntries {
     this.waiting.update((waiting) => new Map([...waiting, [id, entries]]));
   }
 
-  /** They were finished, or the item is gone. */
-  forget(id: string): void {
-    if (this.waiting().has(id)) this.waiting.update((waiting) => new Map([...waiting].filter(([key]) => key !== id)));
+  /** They were finished or given up, or the item is gone; true where there were some. */
+  forget(id: string): boolean {
+    const isWaiting = this.waiting().has(id);
+    if (isWaiting) this.waiting.update((waiting) => new Map([...waiting].filter(([key]) => key !== id)));
+    return isWaiting;
   }
 }

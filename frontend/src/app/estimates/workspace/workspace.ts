@@ -18,6 +18,7 @@ import { SavingIndicator } from '../../ui/page/saving-indicator';
 import { Skeleton } from '../../ui/page/skeleton';
 import { TallyBar } from '../../ui/page/tally-bar';
 import { UndoButtons } from '../../ui/page/undo-buttons';
+import { UnfinishedEntries } from '../draft/unfinished-entries';
 import { EstimateStore } from '../estimate-store';
 import type { OpenEstimate } from '../open-estimate';
 import { MemberSelection } from '../members/member-selection';
@@ -50,6 +51,7 @@ const longestWait_ms = 2000;
 })
 export class Workspace implements OnInit {
   private readonly selection = inject(MemberSelection);
+  private readonly unfinished = inject(UnfinishedEntries);
   private readonly title = inject(PageTitle, { optional: true });
   private readonly document = inject(DOCUMENT);
   protected readonly store = inject(EstimateStore);
@@ -87,7 +89,7 @@ export class Workspace implements OnInit {
   /** Half a length or an impossible shape is the first thing one takes back. */
   protected undo(): void {
     const shown = this.selection.isOnPlace() ? this.selection.member() : undefined;
-    if (!shown || !this.store.giveUpUnfinished(shown.id)) this.show(this.store.undo());
+    if (!shown || !this.unfinished.forget(shown.id)) this.show(this.store.undo());
   }
 
   protected redo(): void {
