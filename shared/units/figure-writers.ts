@@ -5,6 +5,7 @@ import { lengthFigure } from '#shared/units/format-length';
 import { inMetric } from '#shared/units/metric';
 import type { Pen } from '#shared/units/pen';
 import { trueMinus } from '#shared/units/true-minus';
+import type { WordCode } from '#shared/words/word-code';
 
 type Write = (figure: number) => string;
 
@@ -42,18 +43,26 @@ function durationWriter({ worded }: Pen): Write {
   };
 }
 
-const metricArea = ({ worded }: Pen): Write => {
+/** An area with as many decimals as its unit takes everywhere, so that figures under each other align; nothing is a plain nought. */
+const areaIn =
+  ({ worded }: Pen, code: WordCode) =>
+  (size: number, digits: number): string =>
+    worded(code, size, digits, size === 0 ? 0 : digits);
+
+const metricArea = (pen: Pen): Write => {
+  const [small, large] = [areaIn(pen, 'unit-square-centimetres'), areaIn(pen, 'unit-square-metres')];
   return (area_mm2) =>
     Math.abs(area_mm2) < 1e6
-      ? worded('unit-square-centimetres', inMetric(area_mm2, 'mm2', 'cm2'), Math.abs(area_mm2) < 1e4 ? 2 : 0)
-      : worded('unit-square-metres', inMetric(area_mm2, 'mm2', 'm2'), 2);
+      ? small(inMetric(area_mm2, 'mm2', 'cm2'), Math.abs(area_mm2) < 1e4 ? 2 : 0)
+      : large(inMetric(area_mm2, 'mm2', 'm2'), 2);
 };
 
-const imperialArea = ({ worded }: Pen): Write => {
+const imperialArea = (pen: Pen): Write => {
+  const [small, large] = [areaIn(pen, 'unit-square-inches'), areaIn(pen, 'unit-square-feet')];
   return (area_mm2) =>
     Math.abs(area_mm2) < squareMillimetresPerSquareFoot
-      ? worded('unit-square-inches', area_mm2 / squareMillimetresPerSquareInch, 1)
-      : worded('unit-square-feet', area_mm2 / squareMillimetresPerSquareFoot, 2);
+      ? small(area_mm2 / squareMillimetresPerSquareInch, 1)
+      : large(area_mm2 / squareMillimetresPerSquareFoot, 2);
 };
 
 function lengthWriter({ settings: { lengthUnit, locale }, withUnit }: Pen): Write {
