@@ -1,5 +1,5 @@
 import { emptyAlternatives } from '#shared/estimates/is-empty-alternative';
-import { startPrices } from '#shared/estimates/start-prices';
+import { pricesOfOtherCurrency } from '#shared/estimates/prices-of-other-currency';
 import type { EstimateInput } from '#shared/estimates/estimate-figures';
 import { estimateFigures, prepareEstimate } from '#shared/estimates/estimate-figures';
 import type { EstimateSettings } from '#shared/estimates/settings';
@@ -15,7 +15,7 @@ const alternative = (id: string, replaces: readonly string[] = []) => ({ id, nam
 describe('what is said of a draft before its price', () => {
   it('warns of start prices taken as another currency, hours and leaf each until they are one’s own', () => {
     const said = (card: typeof startCard, currency: string) =>
-      startPrices(input({ card, currency })).map(({ values }) => values['of']);
+      pricesOfOtherCurrency(input({ card, currency })).map(({ values }) => values['of']);
     const { grades } = startCard.money;
     const ownHours = {
       ...startCard,
@@ -30,6 +30,31 @@ describe('what is said of a draft before its price', () => {
     expect(said(startCard, 'JPY')).toEqual(['hours', 'leaf']);
     expect(said(ownHours, 'JPY')).toEqual(['leaf']);
     expect(said(own, 'JPY')).toEqual([]);
+  });
+
+  it('warns of own prices entered in another currency, until the card was changed since', () => {
+    const { grades } = startCard.money;
+    const ownIn = (currency?: string): typeof startCard => ({
+      ...startCard,
+      leaf: { ...startCard.leaf, products: startCard.leaf.products.map((one) => ({ ...one, price: '71.5' })) },
+      money: { ...startCard.money, grades: grades.map((grade) => ({ ...grade, costPerHour: '52' })), currency },
+    });
+    const said = (card: typeof startCard, currency: string) =>
+      pricesOfOtherCurrency(input({ card, currency })).map(({ code, values }) => [code, values['of'], values['start']]);
+    expect(said(ownIn('EUR'), 'USD')).toEqual([
+      ['card-other-currency', 'hours', 'EUR'],
+      ['card-other-currency', 'leaf', 'EUR'],
+    ]);
+    expect(said(ownIn('USD'), 'EUR')).toHaveLength(2);
+    expect(said(ownIn('USD'), 'USD')).toEqual([]);
+    // A card of before this was written down: nobody knows, so nothing is said.
+    expect(said(ownIn(), 'USD')).toEqual([]);
+    // Hours are one’s own, leaf is as it began.
+    const mixed = { ...ownIn('GBP'), leaf: startCard.leaf };
+    expect(said(mixed, 'USD')).toEqual([
+      ['card-other-currency', 'hours', 'GBP'],
+      ['card-start-prices', 'leaf', 'EUR'],
+    ]);
   });
 
   it('is told with the price, as a warning that stops nothing', () => {

@@ -13,7 +13,7 @@ import { riskOfWork } from '#shared/estimates/risk-of-work';
 import type { RiskInput } from '#shared/estimates/risk/risk-input';
 import type { Risk } from '#shared/estimates/risk/risk';
 import type { EstimateSettings } from '#shared/estimates/settings';
-import { startPrices } from '#shared/estimates/start-prices';
+import { pricesOfOtherCurrency } from '#shared/estimates/prices-of-other-currency';
 import { workFigures } from '#shared/estimates/work-figures';
 import { currencyDigits } from '#shared/money/currency-digits';
 import { stagePayments } from '#shared/money/stage-payments';
@@ -127,7 +127,7 @@ const costFigures = ({ work, input }: PreparedEstimate, price: Price, risk: Risk
     leaf?.laying?.way === 'lays' ? [{ zoneId: zone.id, options: leaf.laying.options }] : [],
   ),
   risk,
-  findings: [...price.findings, ...startPrices(input)],
+  findings: [...price.findings, ...pricesOfOtherCurrency(input)],
 });
 
 /** All figures of a prepared estimate: money in whole minor units, stages of the gross price. Without risk, a contingency from risk is 0. */

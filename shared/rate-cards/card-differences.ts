@@ -89,11 +89,24 @@ function differences(before: unknown, after: unknown, place: Place): CardDiffere
   return values[0] === values[1] ? [] : [line(place, 'changed', values)];
 }
 
+/** A part as it is compared: in which currency prices are meant is kept by the program, and nobody's change. */
+function compared(card: RateCard, section: CardSection): unknown {
+  if (section !== 'money') return card[section];
+  const { currency: _kept, ...money } = card.money;
+  return money;
+}
+
 /**
  * Every difference between two cards, part by part and in the order of the later card: one line for each figure changed, and for each item added,
  * removed or moved. Items are matched by id, so a renamed one is a change of its name.
  */
 export const cardDifferences = (before: RateCard, after: RateCard): CardDifference[] =>
   cardSections.flatMap((section) =>
-    differences(before[section], after[section], { section, lists: [], ids: [], names: [], fields: [] }),
+    differences(compared(before, section), compared(after, section), {
+      section,
+      lists: [],
+      ids: [],
+      names: [],
+      fields: [],
+    }),
   );

@@ -110,6 +110,10 @@ export const moneyCardSchema = z
     making: makingSchema,
     terms: termsSchema,
     leafPricesHold_days: z.int().min(0).max(3650),
+    currency: z
+      .string()
+      .regex(/^[A-Z]{3}$/)
+      .optional(),
   })
   .refine((card) => card.taxCategories.some(({ id }) => id === card.defaultTaxCategoryId), {
     ...complain('entry-not-offered'),

@@ -96,4 +96,6 @@ export interface MoneyCard {
   readonly making: Making;
   readonly terms: PaymentTerms;
   readonly leafPricesHold_days: number;
+  /** The currency the workshop had when the card was last changed (ISO 4217); absent on a card nobody changed since it was planted. */
+  readonly currency?: string | undefined;
 }

@@ -71,6 +71,23 @@ describe('A workshop', () => {
   });
 });
 
+describe('The currency of a card', () => {
+  const currencyOf = async (id: string) => (await wholeCard(api.ours, id)).content.money.currency;
+
+  it('is the workshop’s as it was when something of the card was changed, whatever is sent', async () => {
+    const draft = await draftCard(api.ours, 'Rates in their currency');
+    const lying = (content: RateCard): RateCard => ({ ...content, money: { ...content.money, currency: 'XXX' } });
+    await keep(draft, lying(draft.content), 'Only another name');
+    expect(await currencyOf(draft.id)).toBeUndefined();
+    const named = await wholeCard(api.ours, draft.id);
+    await keep(named, lying(withGilder(named.content, '41')));
+    expect(await currencyOf(draft.id)).toBe('EUR');
+    const { body } = await owner.call(readCardDifferences, { params: { rateCardId: draft.id }, query: {} });
+    expect((body as { differences: CardDifference[] }).differences.map(({ field }) => field)).toEqual(['costPerHour']);
+    await owner.call(removeRateCard, at(await wholeCard(api.ours, draft.id)));
+  });
+});
+
 describe('A copy', () => {
   it('is a draft with everything its model holds', async () => {
     const from = await cardInForce(api.ours);

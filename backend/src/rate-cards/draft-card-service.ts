@@ -2,6 +2,7 @@ import { isDeepStrictEqual } from 'node:util';
 import type { Actor } from '#shared/actor/actor';
 import { Rejection } from '#shared/problems/rejection';
 import type { RateCard } from '#shared/rate-cards/rate-card';
+import type { WorkshopService } from '../accounts';
 import type { Clock } from '../platform/clock/clock';
 import { refuseStale, type Seen } from '../platform/database/keeping';
 import type { CardEffectsRepository } from './card-effects-repository';
@@ -13,6 +14,7 @@ interface Parts {
   readonly cards: RateCardRepository;
   readonly effects: Pick<CardEffectsRepository, 'follow'>;
   readonly history: CardHistory;
+  readonly workshops: Pick<WorkshopService, 'get'>;
   readonly clock: Clock;
 }
 
@@ -24,6 +26,17 @@ export interface CardEntry {
 
 function refuseDated({ inForceFrom }: RateCardHead): void {
   if (inForceFrom !== null) throw new Rejection('conflict', 'rate-card-dated');
+}
+
+const meantIn = ({ money: { currency: _other, ...money }, ...card }: RateCard, currency?: string): RateCard => ({
+  ...card,
+  money: currency === undefined ? money : { ...money, currency },
+});
+
+/** What somebody enters is meant in the workshop's currency; where nothing of it is new, it stays in the one it was entered in. */
+function inCurrency(before: RateCard, content: RateCard, currency: string): RateCard {
+  const unchanged = meantIn(content, before.money.currency);
+  return isDeepStrictEqual(before, unchanged) ? unchanged : meantIn(content, currency);
 }
 
 const saysAlready = (row: RateCardRow, { name, content }: CardEntry): boolean =>
@@ -47,9 +60,10 @@ export class DraftCardService {
   }
 
   /** Keeps a draft; what was sent twice is kept once. */
-  async keep(actor: Actor, seen: Seen, entry: CardEntry): Promise<RateCardHead> {
+  async keep(actor: Actor, seen: Seen, { name, content }: CardEntry): Promise<RateCardHead> {
     const before = await this.parts.cards.lock(actor.workshopId, seen.id);
     refuseDated(before);
+    const entry = { name, content: await this.meantNow(before, content) };
     if (saysAlready(before, entry) && before.version <= seen.version + 1) return before;
     refuseStale(before, seen.version);
     const after = await this.change(actor, before, entry);
@@ -69,7 +83,8 @@ export class DraftCardService {
   /** Puts the content of a workbook in place of a draft's own. */
   async fill(actor: Actor, seen: Seen, content: RateCard): Promise<RateCardHead> {
     const before = await this.standing(actor, seen);
-    const after = await this.change(actor, before, { name: before.name, content });
+    const entry = { name: before.name, content: await this.meantNow(before, content) };
+    const after = await this.change(actor, before, entry);
     await this.parts.history.record(actor, after, { code: 'history-rate-card-filled' });
     return after;
   }
@@ -89,6 +104,11 @@ export class DraftCardService {
     const after = await cards.changeHead(workshopId, before, { name, content, changedAt: clock.now() });
     if (isDeepStrictEqual(before.content, content)) await effects.follow(workshopId, before, after.version);
     return after;
+  }
+
+  private async meantNow({ workshopId, content }: RateCardRow, entered: RateCard): Promise<RateCard> {
+    const { currency } = await this.parts.workshops.get(workshopId);
+    return inCurrency(content, entered, currency);
   }
 
   private async baseOf({ workshopId, basedOnId, content }: RateCardRow): Promise<RateCard> {

@@ -43,7 +43,7 @@ export function openRateCards(platform: Platform, { accounts, audit, effects: wo
   const history = new CardHistory(audit.service);
   const service = new RateCardService({ cards, workshops: accounts.workshops, audit: audit.service, clock });
   const effects = new CardEffectsRepository(database);
-  const drafts = new DraftCardService({ cards, effects, history, clock });
+  const drafts = new DraftCardService({ cards, effects, history, clock, workshops: accounts.workshops });
   const inForce = new CardInForceService({
     ...{ cards, effects, history, clock },
     today: (workshopId) => service.today(workshopId),

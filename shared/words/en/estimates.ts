@@ -27,6 +27,8 @@ export const estimates = {
   'card-start-prices':
     'The rate card still has the {of, select, hours {rates of hours} other {prices of leaf}} every workshop starts from, which were meant in {start}, and here they are taken as {currency}. Enter your own and put the card in force.',
   'currency-issued':
+  'card-other-currency':
+    'The {of, select, hours {rates of hours} other {prices of leaf}} of the rate card were entered in {start}, and here they are taken as {currency}. Enter them anew in a copy of the card and put it in force.',
     'Estimates have been issued in the currency there is, and what is issued never changes. For another currency, found another workshop.',
   'history-estimate-currency':
     'Estimate {number} was carried over to {currency} with the workshop; its prices stayed the numbers they were',

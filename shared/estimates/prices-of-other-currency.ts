@@ -15,16 +15,24 @@ function isUntouched(prices: readonly Priced[], start: readonly Priced[]): boole
   return still.length > 0 && still.every(({ id, price }) => began.get(id) === price);
 }
 
-/** Prices a workshop starts from are in one currency; in any other they are figures nobody has looked at. */
-export function startPrices({ card, currency }: { readonly card: RateCard; readonly currency: string }): Finding[] {
-  if (currency === startCurrency) return [];
+/** Prices of the start card are in one currency, those entered since in the one the workshop had; in any other they are figures nobody has looked at. */
+export function pricesOfOtherCurrency({
+  card,
+  currency,
+}: {
+  readonly card: RateCard;
+  readonly currency: string;
+}): Finding[] {
   const rates = (grades: typeof card.money.grades) => grades.map(({ id, costPerHour }) => ({ id, price: costPerHour }));
   const leaf = (products: typeof card.leaf.products) => products.map(({ id, price }) => ({ id, price }));
-  const untouched = [
-    ...(isUntouched(rates(card.money.grades), rates(startMoney.grades)) ? (['hours'] as const) : []),
-    ...(isUntouched(leaf(card.leaf.products), leaf(startLeaf.products)) ? (['leaf'] as const) : []),
-  ];
-  return untouched.map((of) => ({
-    ...{ kind: 'warn', code: 'card-start-prices', values: { of, currency, start: startCurrency } },
-  }));
+  const isAsBegun = {
+    hours: isUntouched(rates(card.money.grades), rates(startMoney.grades)),
+    leaf: isUntouched(leaf(card.leaf.products), leaf(startLeaf.products)),
+  };
+  return (['hours', 'leaf'] as const).flatMap((of): Finding[] => {
+    const meant = isAsBegun[of] ? startCurrency : (card.money.currency ?? currency);
+    if (meant === currency) return [];
+    const code = isAsBegun[of] ? 'card-start-prices' : 'card-other-currency';
+    return [{ kind: 'warn', code, values: { of, currency, start: meant } }];
+  });
 }
