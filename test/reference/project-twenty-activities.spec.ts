@@ -4,8 +4,8 @@ import { isProjectPlan } from '#shared/programme/project-starts';
 import { middlingProject } from './middling-project';
 
 /**
- * The best finishes known of ninety networks of twenty activities and five resources, by their seeds; null where it is proven that there is no plan. Values of
- * published networks of this kind cannot be had here, so these are our own: 83 are proven best (or impossible) by the search run to its end. Of the seven
+ * The best finishes known of ninety networks of twenty activities and five resources, by their seeds; null where it is proven that there is no plan. These
+ * values are our own (`project-published.spec.ts` has those of others): 83 are proven best (or impossible) by the search run to its end. Of the seven
  * of `unproven` the proof does not end; four are known to lie within 5 % of a bound that no plan beats, and three (22, 27 and 75) are the best of up to
  * 300,000 serial plans from seeded orders, made without bounds and without the exact search.
  */
