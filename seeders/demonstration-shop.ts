@@ -58,6 +58,7 @@ export function demonstrationShop(today: Day, memberships: Memberships): Shop {
   return {
     hours: [fullDay, fullDay, fullDay, fullDay, shortDay, [], []],
     productiveShare_percent: 75,
+    overtime_percent: 50,
     days: closed,
     climates,
     places: [

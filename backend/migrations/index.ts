@@ -15,6 +15,7 @@ import { takenBack } from './0051-taken-back';
 import { writtenOffBecause } from './0052-written-off-because';
 import { lettersAboutInvoices } from './0053-letters-about-invoices';
 import { severalMeasures } from './0054-several-measures';
+import { handsAndOvertime } from './0055-hands-and-overtime';
 import { currencyOfCards } from './0056-currency-of-cards';
 
 /** Every step of the schema, in the order in which they are taken. A step that was released is never changed. */
@@ -35,5 +36,6 @@ export const migrations: readonly Migration[] = [
   writtenOffBecause,
   lettersAboutInvoices,
   severalMeasures,
+  handsAndOvertime,
   currencyOfCards,
 ];

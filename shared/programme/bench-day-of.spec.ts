@@ -39,6 +39,7 @@ const item = (taskId: string, more: Partial<ProgrammeItem> = {}): ProgrammeItem 
 /** Size at nine, to be laid between noon and three and done by then; a tone two days later by somebody else. */
 const job = (more: Partial<BenchJob> = {}): BenchJob => ({
   ...{ estimateId: 'estimate', number: '2027-001', title: 'Table', placeHolds: [], approvals: [], marks: [] },
+  ...{ revision: 0, keptAt: null },
   paces: [{ id: 'oil', stretches: [{ from_minutes: 0, factor: 1.5 }] }],
   items: [item('size'), item('lay'), item('tone')],
   lags: [
@@ -49,6 +50,7 @@ const job = (more: Partial<BenchJob> = {}): BenchJob => ({
   plan: {
     ...{
       status: 'feasible',
+      from_minutes: 0,
       start_minutes: at(0, 8),
       finish_minutes: at(2, 15),
       lowerBound_minutes: 0,

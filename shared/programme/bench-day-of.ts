@@ -23,6 +23,9 @@ export interface BenchJob extends PromisedPlan {
   readonly paces: ProgrammeRequest['paces'];
   readonly approvals: ProgrammeRequest['approvals'];
   readonly marks: readonly TaskMark[];
+  /** How often its plan was kept anew, and when it was last (ISO 8601; null: not known). */
+  readonly revision: number;
+  readonly keptAt: string | null;
 }
 
 /** Whose day it is (null: everybody's), which one, and what time it is now. */

@@ -16,6 +16,8 @@ export interface MemberCarving extends LotProgramme {
 export interface CarvedPiece {
   readonly pieceName: (pieceId: string) => string;
   readonly gradeName: (gradeId: string) => string;
+  /** Hands it takes at once, where that was entered. */
+  readonly handsOf: (workId: string) => number | null;
 }
 
 type HoursByGrade = Map<string, number>;
@@ -60,8 +62,8 @@ function itemTask(
   const { kind, gradeId } = which;
   const id = kind === 'carved' ? carvedTaskId(member.id) : carvingTaskId(member.id, gradeId);
   const handsOn_minutes = kind === 'carved' ? 0 : countUp(which.hours * 60);
-  const crew = kind === 'carved' ? 0 : 1;
-  const mostPeople = kind === 'carved' ? 0 : Math.min(4, Math.max(1, member.count));
+  const crew = kind === 'carved' ? 0 : (names.handsOf(id) ?? 1);
+  const mostPeople = kind === 'carved' ? 0 : Math.max(crew, Math.min(4, member.count));
   const times = { release_minutes: 0, pinned_minutes: null, happened: null };
   const { name } = member;
   const whole = { lot: name, pieceId: member.pieceId, piece: names.pieceName(member.pieceId), memberIds: [member.id] };

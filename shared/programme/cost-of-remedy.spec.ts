@@ -1,4 +1,4 @@
-import { costOfRemedy, overtime_percent } from '#shared/programme/cost-of-remedy';
+import { costOfRemedy } from '#shared/programme/cost-of-remedy';
 import { programmeFrame } from '#shared/programme/programme-frame';
 import { programmeRemedies } from '#shared/programme/programme-remedies';
 import type { ProgrammeTask } from '#shared/programme/programme-request';
@@ -7,23 +7,37 @@ import type { WordCode } from '#shared/words/word-code';
 
 const frame = programmeFrame('2027-01-04', 'Europe/Berlin');
 const rates = [{ gradeId: 'gilder', costPerHour: '33.00' }];
-const known = { frame, rates, setUp_hours: 0.5, digits: 2 };
+const known = { frame, rates, setUp_hours: 0.5, digits: 2, overtime_percent: 50 };
 
 /** A task that takes nine hours in one go, where a day has eight. */
 const nineHours = (changes: Partial<ProgrammeTask> = {}) =>
   requestForSpecs({ tasks: [taskForSpecs('lay', { handsOn_minutes: 540, isBreakable: false, ...changes })] });
 
-function costs(request: ReturnType<typeof nineHours>, sizeDifference_minor = 0): Map<WordCode, number | null> {
+function costs(
+  request: ReturnType<typeof nineHours>,
+  { sizeDifference_minor = 0, overtime_percent = 50 } = {},
+): Map<WordCode, number | null> {
   const remedies = programmeRemedies(request, 'lay', { otherSizes: [] });
   return new Map(
-    remedies.map((remedy) => [remedy.code, costOfRemedy(remedy, { ...known, request, sizeDifference_minor })]),
+    remedies.map((remedy) => [
+      remedy.code,
+      costOfRemedy(remedy, { ...known, request, sizeDifference_minor, overtime_percent }),
+    ]),
   );
 }
 
 describe('What a remedy costs', () => {
   it('is the premium of every hour beyond those people have: one hour at 33.00, half as much again, is 16.50', () => {
-    expect(overtime_percent).toBe(50);
     expect(costs(nineHours()).get('programme-remedy-longer-day')).toBe(1650);
+  });
+
+  it.each([
+    [0, 0],
+    [25, 825],
+    [33.3, 1099],
+    [100, 3300],
+  ])('at the workshop’s own premium of %d %% is %d minor units for that hour', (overtime_percent, expected) => {
+    expect(costs(nineHours(), { overtime_percent }).get('programme-remedy-longer-day')).toBe(expected);
   });
 
   it('is the set-up of each further day of portions: two halves of four and a half hours go on two days', () => {

@@ -15,12 +15,11 @@ import type { WorkingSpans } from '#shared/programme/working-spans';
 
 /** What a remedy is reckoned with: the request as it was before it, the rates of the card, and what the estimate says another size makes of its cost. */
 export interface RemedyCostAsked extends FurtherHandsAsked {
+  /** What an hour beyond a person's own costs more than one within them; the workshop's own value. */
+  readonly overtime_percent: number;
   /** In minor units; 0 where no other size is tried. */
   readonly sizeDifference_minor: MinorUnits;
 }
-
-/** What an hour beyond a person's own costs more than one within them, in percent (house value, no source). */
-export const overtime_percent = 50;
 
 type RateOf = (gradeId: string) => D;
 
@@ -54,13 +53,14 @@ const minutesBeyond = (spans: readonly MomentSpan[], own: WorkingSpans | undefin
 /** What it costs that people of the workshop are at it outside the hours they had before; who was not there before has none. */
 function overtime(remedy: Remedy, asked: RemedyCostAsked): D {
   const { calendar, people } = asked.request;
+  const premium = exactFigure(asked.overtime_percent);
   const days = calendarDays(calendar, daysUntil(asked.request, remedy.plan.finish_minutes ?? 0));
   const spansOf = new Map(people.map((person) => [person.id, personSpans(days, person, calendar)]));
   const beyond = ({ spans, personIds }: PlannedTask): number =>
     personIds.reduce((sum, personId) => sum + minutesBeyond(spans, spansOf.get(personId)), 0);
   return workedIn(remedy).reduce(
     (cost, { planned, task }) =>
-      cost.plus(rateOf(asked)(task.gradeId).times(beyond(planned)).times(overtime_percent).dividedBy(6000)),
+      cost.plus(rateOf(asked)(task.gradeId).times(beyond(planned)).times(premium).dividedBy(6000)),
     new D(0),
   );
 }

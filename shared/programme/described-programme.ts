@@ -10,6 +10,7 @@ import type { Finding } from '#shared/words/finding';
 export const noPlan = (request: ProgrammeRequest, status: ProjectStatus, findings: readonly Finding[]): Programme => ({
   status,
   tasks: [],
+  from_minutes: request.start_minutes,
   start_minutes: request.start_minutes,
   finish_minutes: null,
   lowerBound_minutes: request.start_minutes,
@@ -35,6 +36,7 @@ export function describedProgramme(
   return {
     status: finish <= bound ? 'optimal' : 'feasible',
     tasks: plannedTasks({ request, network, positions }, finish),
+    from_minutes: request.start_minutes,
     start_minutes: Math.min(...positions.map(({ start }) => start), finish),
     finish_minutes: finish,
     lowerBound_minutes: Math.min(bound, finish),

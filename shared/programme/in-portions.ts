@@ -1,8 +1,10 @@
+import { isHeldByPin } from '#shared/programme/is-held-by-pin';
 import type { ProgrammeLag, ProgrammeRequest, ProgrammeTask } from '#shared/programme/programme-request';
 
 /** The tasks that most lags tie to one, directly or through others, with itself; none of those that have happened or are pinned. */
-export function tasksTiedTo({ tasks, lags }: ProgrammeRequest, taskId: string): ReadonlySet<string> {
-  const movable = new Set(tasks.filter((task) => !task.happened && task.pinned_minutes === null).map(({ id }) => id));
+export function tasksTiedTo(request: ProgrammeRequest, taskId: string): ReadonlySet<string> {
+  const { tasks, lags } = request;
+  const movable = new Set(tasks.filter((task) => !task.happened && !isHeldByPin(task, request)).map(({ id }) => id));
   const ties = lags.filter(
     ({ most, fromTaskId, toTaskId }) => most !== null && movable.has(fromTaskId) && movable.has(toTaskId),
   );

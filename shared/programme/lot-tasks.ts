@@ -7,7 +7,7 @@ import type { WorkingTime } from '#shared/drying/working-time';
 import { countUp } from '#shared/money/settled';
 import type { ItemTask } from '#shared/programme/lot-programme';
 import type { LotInput } from '#shared/programme/programme-inputs';
-import { coatTaskId } from '#shared/programme/task-id';
+import { coatTaskId, stepWorkId } from '#shared/programme/task-id';
 
 /** A lot to be turned into tasks: its steps at the reference air, its people as entered, and the longest day of the workshop. */
 export interface LotToPlan {
@@ -21,6 +21,8 @@ export interface LotToPlan {
   /** Identical pieces of its members together: so many people may be at it at most. */
   readonly pieces: number;
   readonly input: LotInput | null;
+  /** Hands a step takes at once, where that was entered for it. */
+  readonly handsOf: (workId: string) => number | null;
   readonly time: WorkingTime;
   readonly gradeName: (gradeId: string) => string;
 }
@@ -97,7 +99,7 @@ interface At {
 
 function handsOf(step: SequenceStep, lot: LotToPlan): { crew: number; mostPeople: number } {
   if (step.handsOn_minutes === 0) return { crew: 0, mostPeople: 0 };
-  const crew = lot.input?.crew ?? 1;
+  const crew = lot.handsOf(stepWorkId(lot.sequence.lotId, step.stepId)) ?? lot.input?.crew ?? 1;
   const most = lot.input?.mostPeople ?? Math.min(2, lot.pieces);
   return { crew, mostPeople: Math.max(crew, sharedWork.includes(step.kind) ? most : crew) };
 }

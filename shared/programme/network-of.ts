@@ -1,6 +1,7 @@
 import { addDays, daysBetween } from '#shared/calendar/add-days';
 import { calendarDays, exceptionsByDay, hoursOn, type CalendarDay } from '#shared/programme/calendar-days';
 import { crewAtWork, crewsOf, type CrewHours } from '#shared/programme/crews';
+import { isHeldByPin } from '#shared/programme/is-held-by-pin';
 import { firstPosition } from '#shared/programme/earliest-times';
 import {
   clockProgress,
@@ -64,7 +65,9 @@ function happenedPosition(task: ProgrammeTask, { start_minutes }: ProgrammeReque
   const crew = crewAtWork(happened.personIds, happened.left_minutes, hours);
   if (happened.left_minutes === 0)
     return { start: happened.start_minutes, end: happened.end_minutes, busyFrom: happened.start_minutes, crew };
-  const rest = firstPosition({ isBreakable: true }, crew, { start: start_minutes, end: -Infinity });
+  // What is left of it comes after its start, also where a plan is judged from an earlier moment.
+  const from = Math.max(start_minutes, happened.start_minutes);
+  const rest = firstPosition({ isBreakable: true }, crew, { start: from, end: -Infinity });
   return rest && { start: happened.start_minutes, end: rest.end, busyFrom: rest.start, crew };
 }
 
@@ -73,13 +76,12 @@ const clash = (one: Position, other: Position): boolean =>
   other.busyFrom < one.end &&
   one.crew.people.some((person) => other.crew.people.includes(person));
 
-/** Where a pinned task stands: with the first who can begin then and are not held by what stands already; null where there are none. */
+/** Where a task stands that is held by its pin: with the first who can begin then and are not held by what stands already; null where there are none. */
 function pinnedPosition(
-  task: ProgrammeTask,
+  { pinned_minutes, isBreakable }: ProgrammeTask,
   crews: NetworkTask['crews'],
   standing: readonly Position[],
 ): Position | null {
-  const { pinned_minutes, isBreakable } = task;
   if (pinned_minutes === null) return null;
   for (const crew of crews) {
     const found = firstPosition({ isBreakable }, crew, { start: pinned_minutes, end: -Infinity });
@@ -99,7 +101,7 @@ function networkTasks(
   const crews = request.tasks.map((task) => crewsOf(task, hours));
   const standing = anchors.filter((anchor) => anchor !== null);
   request.tasks.forEach((task, at) => {
-    const pinned = task.happened ? null : pinnedPosition(task, crews[at], standing);
+    const pinned = isHeldByPin(task, request) ? pinnedPosition(task, crews[at], standing) : null;
     if (pinned) standing.push(pinned);
     anchors[at] ??= pinned;
   });

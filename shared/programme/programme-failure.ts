@@ -1,3 +1,4 @@
+import { isHeldByPin } from '#shared/programme/is-held-by-pin';
 import { planBreaches } from '#shared/programme/plan-breaches';
 import type { FirstResult } from '#shared/programme/request-network';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
@@ -6,11 +7,14 @@ import type { Finding } from '#shared/words/finding';
 
 /** What stops a request before anything is planned: tasks nobody can do, and pins where nobody works. */
 export function requestRefusals(request: ProgrammeRequest, network: TaskNetwork): Finding[] {
-  return request.tasks.flatMap(({ id: about, name: task, pinned_minutes, happened }, at): Finding[] => {
+  return request.tasks.flatMap((asked, at): Finding[] => {
+    const { id: about, name: task, happened } = asked;
     const { crews, anchor } = network.tasks[at];
     if (anchor || happened) return [];
     if (crews.length === 0) return [{ kind: 'refuse', code: 'programme-too-few', values: { task }, about }];
-    return pinned_minutes === null ? [] : [{ kind: 'refuse', code: 'programme-pin-closed', values: { task }, about }];
+    return isHeldByPin(asked, request)
+      ? [{ kind: 'refuse', code: 'programme-pin-closed', values: { task }, about }]
+      : [];
   });
 }
 
@@ -43,10 +47,15 @@ export const missedWindows = (request: ProgrammeRequest, missed: ReadonlySet<str
       return { kind: 'warn', code: 'programme-window-missed', values, about: toTaskId };
     });
 
+/** Pins whose moment was over before anything was planned, of work nobody has begun. */
+export const passedPins = (request: ProgrammeRequest): Finding[] =>
+  request.tasks
+    .filter((task) => task.pinned_minutes !== null && !task.happened && !isHeldByPin(task, request))
+    .map(({ id: about, name: task }) => ({ kind: 'warn', code: 'programme-pin-passed', values: { task }, about }));
+
 /** Pins that break a rule by themselves, whatever else moves. */
 export function pinClashes(request: ProgrammeRequest, network: TaskNetwork, positions: readonly Position[]): Finding[] {
-  const isPinned = (task: number): boolean =>
-    request.tasks[task].pinned_minutes !== null && !request.tasks[task].happened;
+  const isPinned = (task: number): boolean => isHeldByPin(request.tasks[task], request);
   const about = planBreaches(network, positions).flatMap((breach) => {
     const concerned = breach.kind === 'lag' ? [breach.arc.to, breach.arc.from] : [breach.task];
     return concerned.find(isPinned) ?? [];

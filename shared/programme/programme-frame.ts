@@ -31,6 +31,10 @@ export const instantOf = (minutes: number, frame: ProgrammeFrame): string =>
 export const minutesOf = (instant: string, { startsAt_ms }: ProgrammeFrame): number =>
   Math.floor((Date.parse(instant) - startsAt_ms) / minute_ms);
 
+/** The first minute that does not begin before an instant (ISO 8601): what is planned from now on starts no earlier. */
+export const minutesFrom = (instant: string, { startsAt_ms }: ProgrammeFrame): number =>
+  Math.ceil((Date.parse(instant) - startsAt_ms) / minute_ms);
+
 /** The day of a minute in the frame's zone. */
 export const dayOfMinutes = (minutes: number, frame: ProgrammeFrame): Day =>
   dayOfInstant(millisecondsOf(minutes, frame), frame.timeZone);

@@ -11,6 +11,15 @@ export interface LotInput {
   readonly places: number | null;
 }
 
+/**
+ * How many hands one kind of work takes at once, where it is not as its lot says: a step of a lot, whatever the coat and portion, or the carving of a
+ * member by one grade (`workIdOf`).
+ */
+export interface WorkHands {
+  readonly workId: string;
+  readonly crew: number;
+}
+
 /** A task that starts where a person put it; an instant in UTC (ISO 8601). */
 export interface TaskPin {
   readonly taskId: string;
@@ -34,6 +43,7 @@ export interface ProgrammeInputs {
   readonly choice: Choice;
   readonly inHand_days: number;
   readonly lots: readonly LotInput[];
+  readonly hands: readonly WorkHands[];
   readonly pins: readonly TaskPin[];
   readonly approvals: readonly GivenApproval[];
 }

@@ -4,6 +4,7 @@ import { programme } from '#shared/programme/programme';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
 import { randomRequestForSpecs } from '#shared/programme/random-request-for-specs';
+import { requestFrom } from '#shared/programme/request-from';
 import { personForSpecs } from '#shared/programme/request-for-specs';
 
 const requests = fc.nat({ max: 1_000_000 }).map((seed) => randomRequestForSpecs(seed, 4));
@@ -95,6 +96,27 @@ describe('Every programme', () => {
       const now = new Map(again.tasks.map((task) => [task.taskId, task.start_minutes]));
       expect(before.filter(({ taskId, start_minutes }) => now.get(taskId) !== start_minutes)).toEqual([]);
     });
+  });
+
+  it('begins nothing that has not happened before the moment it is planned from', () => {
+    fc.assert(
+      fc.property(planned, fc.nat({ max: 9000 }), fc.nat({ max: 3 }), ({ request, plan }, later, happened) => {
+        const done = new Set(plan.tasks.slice(0, happened).map(({ taskId }) => taskId));
+        const tasks = request.tasks.map((task, at) => {
+          const { start_minutes, end_minutes, personIds } = plan.tasks[at];
+          if (!done.has(task.id)) return task;
+          return { ...task, happened: { start_minutes, end_minutes, personIds, left_minutes: 0 } };
+        });
+        const from = requestFrom({ ...request, tasks }, request.start_minutes + later);
+        for (const search of [quick, { ...quick, previous: plan }, { ...quick, incumbent: plan }]) {
+          const again = programme(from, search);
+          expect(again.from_minutes).toBe(request.start_minutes + later);
+          const early = again.tasks.filter((task) => task.start_minutes < again.from_minutes);
+          expect(early.filter(({ taskId }) => !done.has(taskId))).toEqual([]);
+        }
+      }),
+      { numRuns: 60, seed: 1, endOnFailure: true },
+    );
   });
 
   it('that ends by a day wanted keeps every rule too', () => {

@@ -37,11 +37,11 @@ function programmeFor(
     card: startCard,
     estimateAir: { temperature_celsius: 20, humidity_percent: 50 },
     shop: named,
-    inputs: { ...entered, lots: [], pins: [], approvals: [], ...inputs },
+    inputs: { ...entered, lots: [], hands: [], pins: [], approvals: [], ...inputs },
     marks: [],
     promised: [],
     frame: programmeFrame(from, zone),
-    startsOn: from,
+    from_minutes: 0,
     ...more,
   });
 }

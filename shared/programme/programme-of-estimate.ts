@@ -16,7 +16,7 @@ import { otherSizes, type OtherSizeOfLot } from '#shared/programme/other-sizes';
 import { peopleOfShop, placesOfShop } from '#shared/programme/people-of-shop';
 import type { PlannedLot } from '#shared/programme/planned-lot';
 import { placeHoldsOf } from '#shared/programme/place-holds-of';
-import { minutesOf, minutesOfDay, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import { minutesOf, type ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { ProgrammeInputs, TaskMark } from '#shared/programme/programme-inputs';
 import type { ProgrammeItem } from '#shared/programme/programme-item';
 import type { ProgrammeLag, ProgrammeRequest, ProgrammeTask } from '#shared/programme/programme-request';
@@ -39,8 +39,8 @@ export interface ProgrammeOfEstimateInput {
   readonly marks: readonly TaskMark[];
   readonly promised: readonly PromisedWork[];
   readonly frame: ProgrammeFrame;
-  /** Nothing that has not happened starts before this day begins. */
-  readonly startsOn: string;
+  /** Nothing that has not happened starts before this minute of the frame. */
+  readonly from_minutes: number;
 }
 
 /** The request for the solver, what each of its tasks is, which approvals are waited for, and what is to be known before anything is planned. */
@@ -65,6 +65,11 @@ function timeOfShop({ hours, productiveShare_percent }: Shop): WorkingTime {
 
 const membersOf = (work: EstimateWork): Member[] => work.members.map(({ member }) => member);
 
+const handsIn =
+  ({ hands }: ProgrammeInputs) =>
+  (workId: string): number | null =>
+    hands.find((one) => one.workId === workId)?.crew ?? null;
+
 function lotToPlan(lot: LotWork, asked: ProgrammeOfEstimateInput): LotToPlan[] {
   const { work, card, inputs, shop, pieces } = asked;
   const buildUp = card.buildUps.buildUps.find(({ id }) => id === lot.buildUpId);
@@ -81,6 +86,7 @@ function lotToPlan(lot: LotWork, asked: ProgrammeOfEstimateInput): LotToPlan[] {
       shortName: lot.name === '' ? `${piece}: ${buildUp.name}` : lot.name,
       name: lot.name === '' ? buildUp.name : `${lot.name}: ${buildUp.name}`,
       pieces: members.reduce((sum, { count }) => sum + count, 0),
+      handsOf: handsIn(inputs),
       input: inputs.lots.find(({ lotId }) => lotId === lot.id) ?? null,
       time: timeOfShop(shop),
       gradeName: (gradeId) => nameIn(card.money.grades, gradeId),
@@ -111,6 +117,7 @@ function carvingOf(asked: ProgrammeOfEstimateInput): MemberCarving[] {
   const names = {
     pieceName: (id: string) => nameIn(asked.pieces, id),
     gradeName: (id: string) => nameIn(asked.card.money.grades, id),
+    handsOf: handsIn(asked.inputs),
   };
   return membersOf(asked.work).map((member) =>
     carvingTasks(member, hours.get(member.id) ?? new Map<string, number>(), names),
@@ -155,10 +162,10 @@ function requestOf(
     paces: ProgrammeRequest['paces'];
   },
 ): ProgrammeRequest {
-  const { shop, frame, promised, startsOn } = asked;
+  const { shop, frame, promised, from_minutes } = asked;
   return {
     calendar: shopCalendarOf(shop, frame),
-    start_minutes: Math.max(0, minutesOfDay(startsOn, frame)),
+    start_minutes: Math.max(0, from_minutes),
     tasks: parts.tasks.map(({ task }) => task),
     lags: parts.lags,
     approvals: parts.approvals.map(({ id, name, afterTaskId, beforeTaskId, usual_days, given_minutes }) => ({

@@ -30,6 +30,8 @@ export interface PlannedTask extends MomentSpan {
 export interface Programme {
   readonly status: ProgrammePlanStatus;
   readonly tasks: readonly PlannedTask[];
+  /** The moment it was planned from: nothing that had not happened might start before it. Its waits and its gap are reckoned from here. */
+  readonly from_minutes: number;
   readonly start_minutes: number;
   readonly finish_minutes: number | null;
   readonly lowerBound_minutes: number;

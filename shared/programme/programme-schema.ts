@@ -21,10 +21,15 @@ export const programmeId = z.string().min(1).max(400);
 const span = { start_minutes: minutes, end_minutes: minutes };
 const momentSpan = z.strictObject(span);
 
+const crew = z.int().min(1).max(8);
+
+/** Hands one kind of work takes at once, as it is entered; empty: as its lot is worked. */
+export const handsEntry = z.strictObject({ crew: crew.nullable() });
+
 export const lotInput = z.strictObject({
   lotId: programmeId,
   portions: z.int().min(1).max(60).nullable(),
-  crew: z.int().min(1).max(8).nullable(),
+  crew: crew.nullable(),
   mostPeople: z.int().min(1).max(12).nullable(),
   places: z.int().min(0).max(1000).nullable(),
 });
@@ -44,13 +49,19 @@ export const programmeInputsSchema = z
     choice: z.array(identifier).max(100),
     inHand_days: z.int().min(0).max(250),
     lots: z.array(lotInput).max(500),
+    hands: z.array(z.strictObject({ workId: programmeId, crew })).max(2000),
     pins: z.array(z.strictObject({ taskId: programmeId, at: instant })).max(2000),
     approvals: z.array(z.strictObject({ approvalId: programmeId, at: instant })).max(2000),
   })
-  .superRefine(({ lots, pins, approvals }, context) => {
+  .superRefine(({ lots, hands, pins, approvals }, context) => {
     once(
       lots.map((lot) => lot.lotId),
       'lots',
+      context,
+    );
+    once(
+      hands.map((work) => work.workId),
+      'hands',
       context,
     );
     once(
@@ -81,6 +92,7 @@ const plannedTask = z.strictObject({
 export const programmePlanSchema = z.strictObject({
   status: z.enum(['optimal', 'feasible', 'infeasible', 'unproven']),
   tasks: z.array(plannedTask).max(5000),
+  from_minutes: minutes,
   start_minutes: minutes,
   finish_minutes: minutes.nullable(),
   lowerBound_minutes: minutes,

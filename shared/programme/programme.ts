@@ -5,7 +5,13 @@ import { networkBound } from '#shared/programme/network-bound';
 import { daysUntil, networkOf } from '#shared/programme/network-of';
 import { planBreaches } from '#shared/programme/plan-breaches';
 import { programmeContradiction } from '#shared/programme/programme-contradiction';
-import { programmeFailure, missedWindows, pinClashes, requestRefusals } from '#shared/programme/programme-failure';
+import {
+  programmeFailure,
+  missedWindows,
+  passedPins,
+  pinClashes,
+  requestRefusals,
+} from '#shared/programme/programme-failure';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeRequest, ProgrammeSearch } from '#shared/programme/programme-request';
 import { projectSchedule } from '#shared/programme/project-schedule';
@@ -108,5 +114,5 @@ export function programme(request: ProgrammeRequest, search: ProgrammeSearch = {
   if (!first) return noPlan(request, found.endless ? 'infeasible' : 'unproven', [programmeFailure(request, found)]);
   const plan =
     search.backwardFrom_minutes === undefined ? planned(ready, first, search) : backwardProgramme(ready, first, search);
-  return { ...plan, findings: [...plan.findings, ...missedWindows(request, missed)] };
+  return { ...plan, findings: [...plan.findings, ...passedPins(request), ...missedWindows(request, missed)] };
 }

@@ -45,10 +45,17 @@ function portionFindings(items: readonly ProgrammeItem[]): Finding[] {
   return [...told.values()];
 }
 
-/** What stands in the way of planning, or is to be known of it, before anything is planned: grades nobody has, crews and racks that are too few, portions. */
+/** Who helps at work that takes several at once is planned for, and stands in no price: the estimate counts hands-on time once. */
+function helpFindings({ tasks }: ProgrammeRequest): Finding[] {
+  const hands_minutes = tasks.reduce((sum, task) => sum + Math.max(0, task.crew - 1) * task.handsOn_minutes, 0);
+  return hands_minutes === 0 ? [] : [{ kind: 'note', code: 'programme-hands-beyond', values: { hands_minutes } }];
+}
+
+/** What stands in the way of planning, or is to be known of it, before anything is planned: grades nobody has, crews and racks that are too few, portions, help that is not priced. */
 export const requestFindings = (request: ProgrammeRequest, items: readonly ProgrammeItem[], shop: Shop): Finding[] => [
   ...handFindings(items, shop),
   ...crewFindings(request, items, shop),
   ...placeFindings(request, items),
   ...portionFindings(items),
+  ...helpFindings(request),
 ];

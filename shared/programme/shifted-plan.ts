@@ -23,6 +23,7 @@ export const shiftedPlan = (plan: Programme, by_minutes: number): Programme =>
     : {
         ...plan,
         tasks: plan.tasks.map((task) => shiftedTask(task, by_minutes)),
+        from_minutes: plan.from_minutes + by_minutes,
         start_minutes: plan.start_minutes + by_minutes,
         finish_minutes: shiftedOrOpen(plan.finish_minutes, by_minutes),
         lowerBound_minutes: plan.lowerBound_minutes + by_minutes,

@@ -14,12 +14,16 @@ function startHours(day_minutes: number): Shop['hours'][number] {
   return after > 0 ? [morning, { start_minutes: from_minutes, end_minutes: from_minutes + after }] : [morning];
 }
 
+/** Half as much again for an hour of overtime (common practice, no source). */
+const usualOvertime_percent = 50;
+
 /** What is assumed of a workshop that has entered nothing yet: the card's working day and days, one hand of every grade, no racks; ids by the caller. */
 export function shopOfCard({ buildUps, drying, money }: RateCard, newId: () => string): Shop {
   const hours = startHours(Math.round(buildUps.workingDay_hours * 60));
   return {
     hours: Array.from({ length: 7 }, (_, day) => (day < drying.workingDays ? hours : [])),
     productiveShare_percent: buildUps.productiveShare_percent,
+    overtime_percent: usualOvertime_percent,
     days: [],
     climates: [],
     places: [],

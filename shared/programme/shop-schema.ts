@@ -84,6 +84,7 @@ const noneOrYear = (climates: readonly unknown[]): boolean => climates.length ==
 export const shopContentSchema = z.strictObject({
   hours: weekSchema,
   productiveShare_percent: z.number().min(10).max(100),
+  overtime_percent: z.number().min(0).max(300),
   days: itemList(shopDaysSchema, 400),
   climates: z.array(climateSchema).refine(noneOrYear, complain('shop-climates-none-or-year')),
   places: itemList(placeSchema, 60),

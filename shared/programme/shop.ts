@@ -41,6 +41,8 @@ export interface ShopPerson {
 export interface Shop {
   readonly hours: readonly DayHours[];
   readonly productiveShare_percent: number;
+  /** What an hour beyond a person's own costs more than one within them (house value; half as much again is common practice, no source). */
+  readonly overtime_percent: number;
   readonly days: readonly ShopDays[];
   readonly climates: readonly Climate[];
   readonly places: readonly ShopPlace[];

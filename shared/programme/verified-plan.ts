@@ -100,6 +100,7 @@ export function verifiedPlan(plan: Programme, request: ProgrammeRequest): Verifi
       tasks: plannedTasks({ request, network, positions: found }, finish),
       finish_minutes: finish,
     },
+    from_minutes: request.start_minutes,
     start_minutes: found.reduce((start, position) => Math.min(start, position.start), finish),
     ...{ ...bounded(plan, request, finish), plans: plan.plans, findings: plan.findings, cycle: [] },
   };

@@ -32,6 +32,7 @@ export const whatIfAnswerSchema = z.strictObject({
   grossDifference_minor: z.int(),
   rates: z.array(z.strictObject({ gradeId: z.string(), costPerHour: z.string() })),
   setUp_hours: z.number(),
+  overtime_percent: z.number(),
   digits: z.int(),
 });
 export type WhatIfAnswer = z.infer<typeof whatIfAnswerSchema>;

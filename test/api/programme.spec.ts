@@ -12,6 +12,9 @@ import {
 import type { BenchDay } from '#shared/programme/bench-day-schema';
 import type { BenchTask } from '#shared/programme/bench-task';
 import type { BoardAnswer } from '#shared/programme/board-schema';
+import { addDays } from '#shared/calendar/add-days';
+import { dayOfInstant } from '#shared/calendar/day-of-instant';
+import { startOfDay_ms } from '#shared/programme/odd-days';
 import { planDifferences } from '#shared/programme/plan-differences';
 import type { Programme } from '#shared/programme/programme-plan';
 import { readIssue } from '#shared/estimates/issues-endpoints';
@@ -45,6 +48,7 @@ import {
   solved,
   told,
 } from './sample-programme';
+import { workIdOf } from '#shared/programme/work-id-of';
 import { sampleEstimate } from './sample-estimate';
 import { password, startApi, type Api } from './start-api';
 import type { Visitor } from './visitor';
@@ -55,6 +59,8 @@ let owner: Visitor;
 beforeEach(async () => {
   api = await startApi();
   owner = api.as('owner');
+  // Planned twice is planned from the same minute.
+  api.clock.stand();
 }, 60_000);
 afterEach(() => api.stop());
 
@@ -177,6 +183,38 @@ describe('A programme', () => {
     expect(refused.body.errors[0].message).toMatch(/^Nobody here does the work of Carver/);
   });
 
+  test('takes two at once for one step, and for carving, where that is entered; too few are said', async () => {
+    const [first, second] = shopOf('Herons', null).people;
+    const both = { ...second, gradeIds: ['gilder', 'carver'] };
+    await keptShop(api.ours, shopOf('Herons', null, { people: [first, both] }));
+    const { estimateId } = await sampleEstimate(api.ours);
+    const { inputs, items } = await programmeOf(api.ours, estimateId);
+    const smooth = items.find(({ kind }) => kind === 'smooth');
+    const carving = items.find(({ kind, gradeId }) => kind === 'carving' && gradeId === 'carver');
+    if (!smooth || !carving) throw new Error('the sample is smoothed and carved');
+    const hands = [smooth, carving].map((item) => ({ workId: workIdOf(item), crew: 2 }));
+    const keep = (version: number, more: object) =>
+      owner.call(keepProgramme, { ...at(estimateId), version, body: { ...inputs, ...more } });
+    const kept = (await keep(0, { hands })).body as ProgrammeAnswer;
+    const wanted = items.filter((item) => hands.some(({ workId }) => workId === workIdOf(item)));
+    const pairs = kept.request.tasks.filter(({ crew }) => crew === 2).map(({ id }) => id);
+    expect(pairs).toEqual(wanted.map(({ taskId }) => taskId));
+    const hands_minutes = wanted.reduce((sum, { handsOn_minutes }) => sum + handsOn_minutes, 0);
+    expect(kept.findings).toContainEqual(
+      expect.objectContaining({ kind: 'note', code: 'programme-hands-beyond', values: { hands_minutes } }),
+    );
+    const plan = solved(kept.request);
+    for (const { taskId, personIds } of plan.tasks)
+      expect([taskId, personIds.length >= 2]).toEqual([taskId, pairs.includes(taskId) || personIds.length >= 2]);
+    expect(plan.tasks.filter(({ taskId }) => pairs.includes(taskId)).map((task) => task.personIds.length)).toEqual(
+      pairs.map(() => 2),
+    );
+    const three = (await keep(1, { hands: [{ ...hands[1], crew: 3 }] })).body as ProgrammeAnswer;
+    expect(three.findings.map(({ code }) => code)).toContain('programme-crew-short');
+    const twice = await keep(2, { hands: [hands[0], hands[0]] });
+    expect([twice.status, twice.body.errors[0].pointer]).toEqual([400, '/hands/1']);
+  });
+
   test('goes with its job', async () => {
     await shopWith(api.ours, api.ours.people.bench);
     const { jobId, estimateId } = await sampleEstimate(api.ours);
@@ -184,6 +222,76 @@ describe('A programme', () => {
     const { version } = await api.app.jobs.service.get(api.ours.id, jobId);
     expect((await owner.call(removeJob, { params: { jobId }, version })).status).toBe(204);
     expect((await owner.call(readProgramme, at(estimateId))).status).toBe(404);
+  });
+});
+
+describe('Planned in the afternoon', () => {
+  /** The clock stands at a time of the wall on the coming Wednesday. */
+  async function standAt(estimateId: string, minutes: number): Promise<void> {
+    const { timeZone } = await programmeOf(api.ours, estimateId);
+    let day = dayOfInstant(api.clock.now().getTime(), timeZone);
+    do day = addDays(day, 1);
+    while (new Date(`${day}T12:00:00Z`).getUTCDay() !== 3);
+    api.clock.stand(new Date(startOfDay_ms(day, timeZone) + minutes * 60_000 + 20_000));
+    await signInAgain();
+  }
+  /** A session ends after a while, whoever moved the clock. */
+  const signInAgain = () => owner.signIn(api.ours.people.owner.email, password);
+  const nowIn = (answer: { startsAt: string }) =>
+    Math.ceil((api.clock.now().getTime() - Date.parse(answer.startsAt)) / 60_000);
+  const starts = (plan: ProgrammeAnswer['plan']) => (plan?.tasks ?? []).map(({ start_minutes }) => start_minutes);
+
+  test('nothing is placed before 15:07: read, asked what if, and worked out by the server', async () => {
+    await shopWith(api.ours, api.ours.people.bench);
+    const { estimateId } = await sampleEstimate(api.ours);
+    await standAt(estimateId, 15 * 60 + 6);
+    const asRead = await programmeOf(api.ours, estimateId);
+    const whatIf = { day: null, climate: null, furtherGradeIds: [], lots: [] };
+    const asked = await told<WhatIfAnswer>(owner, readWhatIf, { ...at(estimateId), body: whatIf });
+    expect([asRead.request.start_minutes, asked.request.start_minutes]).toEqual([nowIn(asRead), nowIn(asked)]);
+    await told(owner, solveProgramme, { ...at(estimateId), body: { seconds: 1, keepsPlan: false } });
+    await api.platform.tasks.runDue();
+    const kept = await programmeOf(api.ours, estimateId);
+    expect(Math.min(...starts(kept.plan))).toBe(nowIn(kept));
+    expect(Math.min(...starts(solved(asRead.request)))).toBe(nowIn(asRead));
+  });
+
+  test('after closing time its waits are the same as planned, as kept and as read two days later', async () => {
+    await shopWith(api.ours, api.ours.people.bench);
+    const { estimateId } = await sampleEstimate(api.ours);
+    await standAt(estimateId, 19 * 60);
+    const { request, version } = await programmeOf(api.ours, estimateId);
+    const plan = solved(request);
+    const kept = await told<ProgrammeAnswer>(owner, keepPlan, { ...at(estimateId), version, body: plan });
+    expect(kept.plan?.tasks).toEqual(plan.tasks);
+    api.clock.move({ minutes: 2 * 1440 });
+    await signInAgain();
+    const later = await programmeOf(api.ours, estimateId);
+    expect([later.isCurrent, later.plan, later.dates]).toEqual([true, kept.plan, kept.dates]);
+    // What is planned anew starts two days later; a plan made before is not taken once what it begins with is past.
+    expect(later.request.start_minutes).toBe(request.start_minutes + 2 * 1440);
+    const body = { ...plan, plans: plan.plans + 1 };
+    const refused = await owner.call(keepPlan, { ...at(estimateId), version: kept.version, body });
+    expect(refused.status).toBe(422);
+  });
+
+  test('a plan brought after somebody looked at it for half an hour is kept, after two hours it is past', async () => {
+    await shopWith(api.ours, api.ours.people.bench);
+    const { estimateId } = await sampleEstimate(api.ours);
+    await standAt(estimateId, 10 * 60);
+    const { request, version } = await programmeOf(api.ours, estimateId);
+    const plan = solved(request);
+    api.clock.move({ minutes: 120 });
+    const refused = await owner.call(keepPlan, { ...at(estimateId), version, body: plan });
+    const first = request.tasks.find(
+      ({ id }) => id === plan.tasks.find(({ start_minutes }) => start_minutes === request.start_minutes)?.taskId,
+    );
+    expect(refused.body.errors).toContainEqual(
+      expect.objectContaining({ message: `${first?.name ?? ''} would begin in the past.` }),
+    );
+    api.clock.move({ minutes: -90 });
+    const kept = await told<ProgrammeAnswer>(owner, keepPlan, { ...at(estimateId), version, body: plan });
+    expect(kept.plan?.tasks).toEqual(plan.tasks);
   });
 });
 
@@ -461,6 +569,26 @@ describe('A calendar for other programs', () => {
     expect(row.hash).toMatch(/^[0-9a-f]{64}$/);
     await told(owner, revokeFeed, { params });
     expect((await read(secret)).status).toBe(404);
+  });
+
+  test('says of which plan it is: SEQUENCE rises with each plan kept anew, and with nothing else', async () => {
+    const { estimateId, programme } = await acceptedSample(api.ours, api, api.ours.people.bench);
+    const { secret } = await feed(owner, null);
+    const saying = async () => {
+      const calendar = new ICAL.Component(ICAL.parse((await read(secret)).text));
+      const events = calendar.getAllSubcomponents('vevent').map((one) => new ICAL.Event(one));
+      const modified = events.map(({ component }) => String(component.getFirstPropertyValue('last-modified')));
+      return { sequences: [...new Set(events.map(({ sequence }) => sequence))], modified: [...new Set(modified)] };
+    };
+    const second = (at: Date) => `${at.toISOString().slice(0, 19)}Z`;
+    const keptAt = api.clock.now();
+    expect(await saying()).toEqual({ sequences: [0], modified: [second(keptAt)] });
+    api.clock.move({ minutes: 30 });
+    const inputs = { ...programme.inputs, inHand_days: 3 };
+    await told(owner, keepProgramme, { ...at(estimateId), version: programme.version, body: inputs });
+    expect(await saying()).toEqual({ sequences: [0], modified: [second(keptAt)] });
+    await keptPlan(api.ours, estimateId);
+    expect(await saying()).toEqual({ sequences: [1], modified: [second(api.clock.now())] });
   });
 
   test('of a person holds their work only; the bench makes and sees its own alone', async () => {

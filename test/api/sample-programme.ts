@@ -23,6 +23,7 @@ export const everyGrade = ['master-carver', 'carver', 'gilder', 'improver', 'fin
 export const shopOf = (mark: string, membershipId: string | null, more: Partial<ShopContent> = {}): ShopContent => ({
   hours: [allDay, allDay, allDay, allDay, allDay, [], []],
   productiveShare_percent: 80,
+  overtime_percent: 50,
   days: [],
   climates: [],
   places: [{ id: newId(), name: `${mark} rack`, kind: 'rack', capacity: 2 }],

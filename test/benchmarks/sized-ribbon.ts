@@ -37,7 +37,14 @@ export function sizedRibbon(read: ProgrammeAnswer, lots: number, steps: number):
     ...read,
     ...{ items: made.map(({ item }) => item), marks: [], approvals: [], findings: [], broken: [], isCurrent: true },
     plan: {
-      ...{ status: 'feasible', tasks, start_minutes: 0, finish_minutes, lowerBound_minutes: finish_minutes },
+      ...{
+        status: 'feasible',
+        tasks,
+        from_minutes: 0,
+        start_minutes: 0,
+        finish_minutes,
+        lowerBound_minutes: finish_minutes,
+      },
       ...{ gap: 0, plans: 1, findings: [], cycle: [] },
     },
   };

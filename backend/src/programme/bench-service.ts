@@ -79,6 +79,7 @@ export class BenchService {
       ...{ estimateId: job.estimateId, plan: job.plan, items: job.items, placeHolds: job.placeHolds, paces: job.paces },
       ...{ number: names.get(job.jobId)?.number ?? '', title: names.get(job.jobId)?.title ?? '' },
       ...{ lags: job.kept.lags, approvals: job.kept.approvals },
+      ...{ revision: job.kept.revision, keptAt: job.kept.keptAt },
       marks: rows.filter(({ programmeId }) => programmeId === job.estimateId).map(presentMark),
     }));
     return { frame, today, shop: await shops.shop(workshopId), jobs };

@@ -35,6 +35,8 @@ function job(frame: ProgrammeFrame, name = 'Water gilding'): BenchJob {
       placeHolds: [],
       approvals: [],
       marks: [],
+      revision: 3,
+      keptAt: '2027-02-01T09:30:00.000Z',
     },
     ...{ lags: request.lags, paces: [], plan: programme(request) },
     items: [
@@ -113,6 +115,13 @@ describe('A calendar for other programs', () => {
     const [first, second] = [uids('2026-06-01'), uids('2026-06-08')];
     expect(new Set(first).size).toBe(first.length);
     expect(second).toEqual(first);
+  });
+
+  it('says by SEQUENCE and LAST-MODIFIED which plan an event is of, so that the newer one is believed (RFC 5545 3.8.7.3 and 3.8.7.4)', () => {
+    const { events } = eventsFrom('2026-06-01', 'Europe/Dublin');
+    expect(new Set(events.map(({ sequence }) => sequence))).toEqual(new Set([3]));
+    const modified = events.map(({ component }) => component.getFirstPropertyValue('last-modified')?.toString());
+    expect(new Set(modified)).toEqual(new Set(['2027-02-01T09:30:00Z']));
   });
 
   it('counts minutes from the start of its first day in the workshop’s zone', () => {

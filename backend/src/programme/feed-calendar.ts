@@ -24,7 +24,10 @@ function taskName(item: ProgrammeItem, say: FeedAsked['say']): string {
   return portions > 1 ? say('feed-portion', { task, portion, portions }) : task;
 }
 
-/** Each stretch of work is an event; its UID stays the same while the task does, so that a calendar moves it instead of doubling it. */
+/**
+ * Each stretch of work is an event; its UID stays the same while the task does, so that a calendar moves it instead of doubling it. SEQUENCE rises with
+ * each plan that is kept anew (RFC 5545 3.8.7.4) and LAST-MODIFIED says when that was; DTSTAMP is when this calendar was written, as METHOD asks (3.8.7.2).
+ */
 function eventsOf(
   task: PlannedTask,
   item: ProgrammeItem,
@@ -36,6 +39,8 @@ function eventsOf(
   return task.spans.map((span, at) => ({
     id: `${job.estimateId}/${task.taskId}/${String(at)}@bolewright`,
     stamp: now,
+    sequence: job.revision,
+    ...(job.keptAt === null ? {} : { lastModified: new Date(job.keptAt) }),
     start: new Date(millisecondsOf(span.start_minutes, frame)),
     end: new Date(millisecondsOf(span.end_minutes, frame)),
     summary,

@@ -4,7 +4,7 @@ import { dayOfInstant } from '#shared/calendar/day-of-instant';
 import { chosenDraft } from '#shared/estimates/chosen-draft';
 import type { Draft } from '#shared/estimates/draft';
 import { estimateWork, type EstimateWork } from '#shared/estimates/estimate-work';
-import { programmeFrame, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import { minutesFrom, minutesOfDay, programmeFrame, type ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { ProgrammeInputs, TaskMark } from '#shared/programme/programme-inputs';
 import { type EstimateProgramme, programmeOfEstimate } from '#shared/programme/programme-of-estimate';
 import type { PromisedWork } from '#shared/programme/promised-work';
@@ -36,6 +36,8 @@ export interface ProgrammeContext {
   readonly promised: readonly PromisedWork[];
   readonly frame: ProgrammeFrame;
   readonly today: Day;
+  /** The first minute of the frame that is not over. */
+  readonly now_minutes: number;
 }
 
 export interface ContextParts {
@@ -57,6 +59,7 @@ const startInputs = (today: Day): ProgrammeInputs => ({
   choice: [],
   inHand_days: 0,
   lots: [],
+  hands: [],
   pins: [],
   approvals: [],
 });
@@ -102,8 +105,9 @@ export class ProgrammeContexts {
     const known = (await marks.ofProgramme(workshopId, estimateId)).map(presentMark);
     const inputs = asked ?? (await this.agreed(whole, row?.inputs ?? startInputs(today)));
     const frame = programmeFrame(firstDayOf(inputs, known, { known: row?.firstDay ?? today, timeZone }), timeZone);
+    const now_minutes = minutesFrom(this.parts.clock.now().toISOString(), frame);
     return {
-      ...{ workshopId, whole, row, inputs, marks: known, frame, today },
+      ...{ workshopId, whole, row, inputs, marks: known, frame, today, now_minutes },
       draft: chosenDraft(estimates.drafts.draft(whole), inputs.choice),
       card: await cards.card(workshopId, whole.estimate.rateCardId),
       shop: await shops.shop(workshopId),
@@ -124,17 +128,17 @@ export type Otherwise = Partial<Pick<ProgrammeContext, 'draft' | 'card' | 'shop'
 const workOf = ({ draft, card }: Pick<ProgrammeContext, 'draft' | 'card'>): EstimateWork => estimateWork(draft, card);
 
 /**
- * The request of a context. What is planned from now on starts no earlier than today; what was planned before is judged from its own first day, for it
- * does not become wrong by time going by.
+ * The request of a context, planned from a minute of its frame on, and forward no earlier than from the day entered. What is planned anew starts now;
+ * what was planned is judged from the moment it was planned from, for it does not become wrong by time going by.
  */
 export function programmeIn(
   context: ProgrammeContext,
-  from: 'today' | 'first day',
+  from_minutes: number,
   otherwise: Otherwise = {},
 ): EstimateProgramme {
   const at = { ...context, ...otherwise };
-  const entered = at.inputs.direction === 'forward' ? at.inputs.day : at.frame.firstDay;
-  const isAhead = compareDays(entered, at.today) > 0;
+  const { direction, day } = at.inputs;
+  const entered_minutes = direction === 'forward' ? minutesOfDay(day, at.frame) : 0;
   return programmeOfEstimate({
     work: workOf(at),
     pieces: at.draft.pieces,
@@ -145,6 +149,6 @@ export function programmeIn(
     marks: at.marks,
     promised: at.promised,
     frame: at.frame,
-    startsOn: isAhead || from === 'first day' ? entered : at.today,
+    from_minutes: Math.max(entered_minutes, from_minutes),
   });
 }

@@ -1,26 +1,21 @@
-import {
-  instantOf,
-  millisecondsOf,
-  minutesBetween,
-  programmeFrame,
-  type ProgrammeFrame,
-} from '#shared/programme/programme-frame';
+import { instantOf, millisecondsOf, type ProgrammeFrame } from '#shared/programme/programme-frame';
 import type { ProgrammeApproval } from '#shared/programme/lot-programme';
 import type { EstimateProgramme } from '#shared/programme/programme-of-estimate';
 import type { ProgrammeAnswer } from '#shared/programme/programme-schema';
-import { shiftedPlan } from '#shared/programme/shifted-plan';
 import { verifiedPlan } from '#shared/programme/verified-plan';
 import type { Estimates } from '../estimates';
-import { unpackedPlan } from './kept-plan';
+import type { KeptPlan } from './kept-plan';
 import type { ProgrammeContext } from './programme-context';
 import type { ProgrammeRow } from './programme-model';
 
 type IssueRows = Awaited<ReturnType<Estimates['issues']['ofEstimate']>>;
 
-/** What is sent of a programme: the request from today on, the one its plan is judged by, the slot that is held. */
+/** What is sent of a programme: the request from now on, the one its plan is judged by, the slot that is held. */
 export interface ShownProgramme {
   readonly planned: EstimateProgramme;
-  readonly standing: EstimateProgramme;
+  readonly standing: EstimateProgramme | null;
+  /** The plan that was kept, in the minutes of the context's frame. */
+  readonly kept: Pick<KeptPlan, 'plan' | 'dates'> | null;
   readonly hold: ProgrammeAnswer['hold'];
 }
 
@@ -47,10 +42,9 @@ export const presentApproval = (approval: ProgrammeApproval, frame: ProgrammeFra
   givenAt: approval.given_minutes === null ? null : instantOf(approval.given_minutes, frame),
 });
 
-function presentPlan({ row, frame }: ProgrammeContext, { standing }: ShownProgramme) {
-  if (!row?.kept) return { plan: null, isCurrent: false, broken: [], dates: null };
-  const kept = unpackedPlan(row.kept);
-  const plan = shiftedPlan(kept.plan, minutesBetween(programmeFrame(kept.firstDay, kept.timeZone), frame));
+function presentPlan({ kept, standing }: ShownProgramme) {
+  if (!kept || !standing) return { plan: null, isCurrent: false, broken: [], dates: null };
+  const { plan } = kept;
   const stopping = standing.findings.filter(({ kind }) => kind === 'refuse');
   const broken = [...stopping, ...verifiedPlan(plan, standing.request).broken];
   return { plan, isCurrent: broken.length === 0, broken, dates: kept.dates };
@@ -71,7 +65,7 @@ export function presentProgramme(context: ProgrammeContext, shown: ShownProgramm
     approvals: approvals.map((approval) => presentApproval(approval, frame)),
     findings,
     otherSizes,
-    ...presentPlan(context, shown),
+    ...presentPlan(shown),
     hold: shown.hold,
   } as ProgrammeAnswer;
 }

@@ -4,19 +4,18 @@ import { Rejection } from '#shared/problems/rejection';
 import type { SnapshotProgramme } from '#shared/estimates/snapshot';
 import { datesOfProgramme } from '#shared/programme/dates-of-programme';
 import { frozenProgramme } from '#shared/programme/frozen-programme';
-import { minutesBetween, programmeFrame } from '#shared/programme/programme-frame';
+import { programmeFrame } from '#shared/programme/programme-frame';
 import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import type { EstimateProgramme } from '#shared/programme/programme-of-estimate';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeAnswer } from '#shared/programme/programme-schema';
-import { shiftedPlan } from '#shared/programme/shifted-plan';
 import { verifiedPlan } from '#shared/programme/verified-plan';
 import type { Finding } from '#shared/words/finding';
 import type { Audit, Doer } from '../audit';
 import type { Jobs } from '../jobs';
 import type { Clock } from '../platform/clock/clock';
 import { refuseStale } from '../platform/database/keeping';
-import { type KeptPlan, packed, unpackedPlan } from './kept-plan';
+import { type KeptPlan, packed, planIn, unpackedPlan } from './kept-plan';
 import { refuseFarInputs } from './refuse-far-inputs';
 import { firstDayOf, programmeIn, type ProgrammeContext, type ProgrammeContexts } from './programme-context';
 import type { ProgrammeRow } from './programme-model';
@@ -41,6 +40,11 @@ const isSame = (one: unknown, other: unknown): boolean => canonicalJson(one) ===
 /** Sent twice: what was kept says this already, as the version seen or the next. */
 const isRepeat = (row: ProgrammeRow, version: number): boolean =>
   row.version === version || row.version === version + 1;
+
+/** Whether a programme has this plan already, however often and whenever it was kept. */
+function isSamePlan({ kept: bytes }: ProgrammeRow, { revision, keptAt, ...plan }: KeptPlan): boolean {
+  return bytes !== null && isSame({ ...unpackedPlan(bytes), revision, keptAt }, { ...plan, revision, keptAt });
+}
 
 /** Programmes of estimates: read, entered, and their plans kept. */
 export class ProgrammeService {
@@ -75,14 +79,15 @@ export class ProgrammeService {
     const { workshopId } = actor;
     const row = await this.lock(workshopId, at.id);
     const context = await this.parts.contexts.of(workshopId, at.id);
-    const programme = programmeIn(context, 'first day');
+    const programme = programmeIn(context, broughtFrom(plan, context));
     const { plan: found, broken } = verifiedPlan(plan, programme.request);
     const kept = found && this.keptPlan(context, programme, found);
-    const isAgain = kept !== null && row.version === at.version + 1 && row.kept?.equals(packed(kept));
+    const isAgain = kept !== null && row.version === at.version + 1 && isSamePlan(row, kept);
     if (isAgain) return this.answer(context);
     refuseStale(row, at.version);
     if (!kept) throw notKept(broken);
     refuseWhereStopped(programme);
+    refusePast(kept.plan, programme, context);
     await this.store(actor, context, kept);
     return this.read(workshopId, at.id);
   }
@@ -92,7 +97,7 @@ export class ProgrammeService {
     const row = await this.parts.programmes.hold(actor.workshopId, at.id);
     if (row?.version !== at.version) return false;
     const context = await this.parts.contexts.of(actor.workshopId, at.id);
-    const programme = programmeIn(context, 'first day');
+    const programme = programmeIn(context, plan.from_minutes);
     const { plan: found } = verifiedPlan(plan, programme.request);
     if (!found) return false;
     await this.store(actor, context, this.keptPlan(context, programme, found));
@@ -115,8 +120,8 @@ export class ProgrammeService {
     // An issue speaks of the base; dates of another choice of alternatives are not its own.
     if (!kept?.dates || context.inputs.choice.length > 0) return null;
     const frame = programmeFrame(kept.firstDay, kept.timeZone);
-    const plan = shiftedPlan(kept.plan, minutesBetween(frame, context.frame));
-    const { broken } = verifiedPlan(plan, programmeIn(context, 'first day').request);
+    const plan = planIn(kept, context.frame);
+    const { broken } = verifiedPlan(plan, programmeIn(context, plan.from_minutes).request);
     return broken.length > 0 ? null : frozenProgramme({ ...kept, dates: kept.dates, frame });
   }
 
@@ -136,12 +141,14 @@ export class ProgrammeService {
   }
 
   private keptPlan(context: ProgrammeContext, programme: EstimateProgramme, plan: Programme): KeptPlan {
-    const { frame, inputs, shop, promised } = context;
+    const { frame, inputs, shop, promised, row } = context;
     const { request, items, approvals } = programme;
     const { lags, paces, placeHolds } = request;
     const dates = datesOfProgramme({ plan, request, approvals, inputs, shop, frame, promisedJobs: promised.length });
     const { firstDay, timeZone } = frame;
-    return { firstDay, timeZone, plan, items, approvals, lags, paces, placeHolds, dates };
+    const made = { firstDay, timeZone, plan, items, approvals, lags, paces, placeHolds, dates };
+    const revision = row?.kept ? unpackedPlan(row.kept).revision + 1 : 0;
+    return { ...made, revision, keptAt: this.parts.clock.now().toISOString() };
   }
 
   private async store(actor: Doer, context: ProgrammeContext, kept: KeptPlan): Promise<void> {
@@ -154,11 +161,13 @@ export class ProgrammeService {
   }
 
   private async answer(context: ProgrammeContext): Promise<ProgrammeAnswer> {
-    const { workshopId, whole, row, today } = context;
+    const { workshopId, whole, row, today, frame, now_minutes } = context;
     const issues = await this.parts.estimates.issues.ofEstimate(workshopId, whole.estimate.id);
+    const written = row?.kept ? unpackedPlan(row.kept) : null;
+    const kept = written && { dates: written.dates, plan: planIn(written, frame) };
     return presentProgramme(context, {
-      planned: programmeIn(context, 'today'),
-      standing: programmeIn(context, 'first day'),
+      ...{ planned: programmeIn(context, now_minutes), kept },
+      standing: kept && programmeIn(context, kept.plan.from_minutes),
       hold: holdOf(row, issues, today),
     });
   }
@@ -167,6 +176,34 @@ export class ProgrammeService {
 function notKept(broken: readonly Finding[]): Rejection {
   const complaints = broken.map(({ code, values, about }) => ({ path: about ? [about] : [], code, values }));
   return new Rejection('unprocessable', 'programme-plan-broken', { complaints });
+}
+
+/** The clock of whoever planned what is brought may differ, and it may have been planned a while ago: by a day at most. */
+const broughtWithin_minutes = 1440;
+
+/** The moment a plan that is brought was planned from, as far as that can be. */
+function broughtFrom({ from_minutes }: Programme, { now_minutes }: ProgrammeContext): number {
+  const [first, last] = [now_minutes - broughtWithin_minutes, now_minutes + broughtWithin_minutes];
+  return Math.min(last, Math.max(first, from_minutes));
+}
+
+/** So much of a plan may have gone by until somebody who has looked at it keeps it. */
+const lookedAt_minutes = 60;
+
+/** Refuses a plan in which work that nobody has begun lies in the past. */
+function refusePast({ tasks }: Programme, { request }: EstimateProgramme, { now_minutes }: ProgrammeContext): void {
+  const begun = new Set(request.tasks.filter(({ happened }) => happened).map(({ id }) => id));
+  const past = tasks.filter(
+    ({ taskId, start_minutes }) => start_minutes < now_minutes - lookedAt_minutes && !begun.has(taskId),
+  );
+  if (past.length === 0) return;
+  const names = new Map(request.tasks.map(({ id, name }) => [id, name]));
+  throw notKept(
+    past.map(({ taskId: about }) => {
+      const values = { task: names.get(about) ?? about };
+      return { kind: 'refuse', code: 'programme-breaks-past', values, about };
+    }),
+  );
 }
 
 /** What stands in the way of any plan stands in the way of this one. */

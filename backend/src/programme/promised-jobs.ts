@@ -2,8 +2,7 @@ import type { Standing } from '#shared/programme/board-schema';
 import { minutesBetween, programmeFrame, type ProgrammeFrame } from '#shared/programme/programme-frame';
 import { promisedWork, type PromisedPlan } from '#shared/programme/promised-plan';
 import type { PromisedWork } from '#shared/programme/promised-work';
-import { shiftedPlan } from '#shared/programme/shifted-plan';
-import { type KeptPlan, unpackedPlan } from './kept-plan';
+import { type KeptPlan, planIn, unpackedPlan } from './kept-plan';
 import type { ProgrammeRepository, PromisedRow, UnplannedRow } from './programme-repository';
 
 /** A promised job as its plan was kept, told in the minutes of another frame. */
@@ -34,7 +33,7 @@ function promisedJob(row: PromisedRow, frame: ProgrammeFrame): PromisedJob {
     items,
     placeHolds,
     paces,
-    plan: shiftedPlan(kept.plan, by_minutes),
+    plan: planIn(kept, frame),
   };
 }
 

@@ -1,17 +1,16 @@
 import { v7 as newId } from 'uuid';
 import type { Actor } from '#shared/actor/actor';
 import { addDays } from '#shared/calendar/add-days';
-import { minutesBetween, minutesOfDay, programmeFrame } from '#shared/programme/programme-frame';
+import { minutesOfDay } from '#shared/programme/programme-frame';
 import type { EstimateProgramme } from '#shared/programme/programme-of-estimate';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { ProgrammeSearch } from '#shared/programme/programme-request';
 import { Rejection } from '#shared/problems/rejection';
-import { shiftedPlan } from '#shared/programme/shifted-plan';
 import type { SolutionAnswer } from '#shared/programme/solution-schema';
 import type { Clock } from '../platform/clock/clock';
 import type { Log } from '../platform/log/log';
 import type { Task, Tasks } from '../platform/tasks/tasks';
-import { packed, unpacked, unpackedPlan } from './kept-plan';
+import { packed, planIn, unpackedPlan, unpackedProgramme } from './kept-plan';
 import { PlanningThread } from './planning-thread';
 import { programmeIn, type ProgrammeContext, type ProgrammeContexts } from './programme-context';
 import { refuseWhereStopped, type ProgrammeService } from './programme-service';
@@ -44,7 +43,7 @@ export const presentSolution = (row: SolutionRow): SolutionAnswer => ({
   plans: row.plans,
   finish_minutes: row.finishMinutes,
   lowerBound_minutes: row.boundMinutes,
-  plan: row.best ? (unpacked<Programme>(row.best) as SolutionAnswer['plan']) : null,
+  plan: row.best ? (unpackedProgramme(row.best) as SolutionAnswer['plan']) : null,
 });
 
 const told = (plan: Programme): SolutionChange => ({
@@ -62,7 +61,7 @@ function searchOf(
   if (inputs.direction === 'backward') return { backwardFrom_minutes: minutesOfDay(addDays(inputs.day, 1), frame) };
   const kept = row?.kept ? unpackedPlan(row.kept) : null;
   if (!kept) return {};
-  const plan = shiftedPlan(kept.plan, minutesBetween(programmeFrame(kept.firstDay, kept.timeZone), frame));
+  const plan = planIn(kept, frame);
   return keepsPlan ? { previous: plan } : { incumbent: plan };
 }
 
@@ -85,7 +84,7 @@ export class SolutionService {
     if (running) return presentSolution(running);
     if ((await solutions.runningOf(workshopId)) >= mostRunning) throw enough();
     const context = await contexts.of(workshopId, estimateId);
-    refuseWhereStopped(programmeIn(context, 'today'));
+    refuseWhereStopped(programmeIn(context, context.now_minutes));
     await solutions.forgetEnded(workshopId, estimateId);
     const nothing = { plans: 0, finishMinutes: null, boundMinutes: null, best: null, isStopped: 0 };
     const row = await solutions.insert(workshopId, {
@@ -119,7 +118,7 @@ export class SolutionService {
       const context = await contexts.of(row.workshopId, row.programmeId);
       const isChanged = context.row?.version !== row.programmeVersion;
       if (isChanged) return await solutions.tell(row.workshopId, id, { state: 'outdated' });
-      await this.end(row, await this.plan(row, context, programmeIn(context, 'today')));
+      await this.end(row, await this.plan(row, context, programmeIn(context, context.now_minutes)));
     } catch (error) {
       // What could not be planned once cannot be planned a second time: it is said, and not tried again.
       log.warn({ error, solution: id }, 'a programme could not be planned');

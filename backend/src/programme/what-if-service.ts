@@ -91,7 +91,7 @@ export class WhatIfService {
     const { card, frame } = context;
     const otherwise = workedOtherwise(context, asked.lots);
     const shop = shopWith(context.shop, asked.furtherGradeIds);
-    const { request, items, findings } = programmeIn(context, 'today', { ...otherwise, shop, inputs });
+    const { request, items, findings } = programmeIn(context, context.now_minutes, { ...otherwise, shop, inputs });
     const { currency } = context.whole.estimate;
     const price = (of: Worked) =>
       this.parts.priced({ draft: of.draft, card: of.card, choice: inputs.choice, currency });
@@ -105,6 +105,7 @@ export class WhatIfService {
       grossDifference_minor: after.price.gross_minor - before.price.gross_minor,
       rates: card.money.grades.map(({ id, costPerHour }) => ({ gradeId: id, costPerHour })),
       setUp_hours: card.buildUps.setUp_hours,
+      overtime_percent: context.shop.overtime_percent,
       digits: currencyDigits(currency),
     };
   }

@@ -15,12 +15,15 @@ export const programmeBoard = {
   'programme-place-short':
     '{lot} takes {amount, plural, one {one place} other {# places}} of {place}, and there {capacity, plural, one {is one} other {are #}}.',
   'programme-lot-fewer-may': 'At least the {crew, plural, one {one} other {#}} it takes.',
+  'programme-hands-beyond':
+    'Work that takes several at once keeps helping hands busy for {hands_minutes}. The price counts hands-on time once: where help has to be paid for, enter it as a line of its own.',
   'programme-in-portions':
     '{step} ({lot}) and what follows it are planned in {portions, plural, one {# portion} other {# portions}}, so that each stays inside its time.',
   'programme-no-plan': 'There is no plan yet.',
   'programme-plan-broken': 'The plan breaks what the programme asks for. What it breaks is listed with it.',
   'programme-breaks-hours': '{task} stands where its people do not work, or where it cannot be done in one go.',
   'programme-breaks-start': '{task} starts before it may.',
+  'programme-breaks-past': '{task} would begin in the past.',
   'programme-breaks-people': '{task} and {other} ask for the same hands at the same time.',
   'programme-breaks-place': '{task} finds no room: {place} is full then.',
   'programme-breaks-lag': '{task} starts before {before} lets it.',
@@ -66,7 +69,7 @@ export const programmeBoard = {
   'history-feed-revoked': 'Took the calendar {name} back',
   'paper-programme': 'Programme',
   'paper-programme-dates':
-    'Work starts on {starts} at the earliest and goes on until {finishes}, {days, plural, one {one working day} other {# working days}}. Offered for {offered}.',
+    'Work starts on {starts} at the earliest and goes on until {finishes}; the workshop is open on {days, plural, one {one day} other {# days}} of that time. Offered for {offered}.',
   'paper-programme-piece': 'Piece',
   'paper-programme-work': 'Work',
   'paper-programme-from': 'From',
@@ -76,7 +79,7 @@ export const programmeBoard = {
   'sheet-programme-note':
     'Dates as they were planned when this was issued. They do not follow the figures of the other sheets.',
   'sheet-programme-whole': 'All of it',
-  'sheet-programme-days': '{days, plural, one {One working day} other {# working days}}',
+  'sheet-programme-days': '{days, plural, one {One open day} other {# open days}} from start to finish',
   'sheet-programme-offered': 'Offered for',
   'feed-workshop': '{workshop}: the board',
   'feed-person': '{workshop}: {person}',

@@ -19,6 +19,8 @@ export const programmePlan = {
   'programme-too-few': 'Nobody, or too few, can do {task}.',
   'programme-impossible': 'With the people and places there are, these lags cannot all be kept.',
   'programme-pin-closed': '{task} is pinned to a time at which nobody can begin it.',
+  'programme-pin-passed':
+    '{task} was pinned to a time that is over, and nobody has marked it as begun: it is planned anew.',
   'programme-pin-clash': '{task} is pinned too early for what has to come before it.',
   'programme-window-missed':
     'The time of {task} is over before {next} can be done. See what the trade does when it was missed, and have somebody look at it.',

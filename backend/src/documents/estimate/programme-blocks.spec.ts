@@ -42,7 +42,7 @@ describe('the programme of an issue', () => {
   it('stands in the paper with its dates and what they assume, without a word of who works', async () => {
     const text = textOfPaper(await estimatePaper({ ...snapshot, programme }, null));
     expect(text).toContain(
-      'Work starts on 9 Mar 2026 at the earliest and goes on until 24 Apr 2026, 33 working days. Offered for 1 May 2026.',
+      'Work starts on 9 Mar 2026 at the earliest and goes on until 24 Apr 2026; the workshop is open on 33 days of that time. Offered for 1 May 2026.',
     );
     expect(text).toMatch(/Table Carving: Frieze 9 Mar 2026 20 Mar 2026/);
     expect(text).toContain('Kept in hand before the day offered: 4 working days.');

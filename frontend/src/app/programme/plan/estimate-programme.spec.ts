@@ -3,6 +3,7 @@ import { TestBed, type ComponentFixture } from '@angular/core/testing';
 import { provideRouter } from '@angular/router';
 import type { Role } from '#shared/actor/role';
 import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
+import { personForSpecs } from '#shared/programme/request-for-specs';
 import type { ProgrammeAnswer } from '#shared/programme/programme-schema';
 import { signIn, words } from '../../../test/sign-in';
 import { NOW } from '../../core/now';
@@ -27,6 +28,7 @@ describe('EstimateProgramme', () => {
     }
   };
   const stands = programmeForSpecs();
+  const further = [personForSpecs('carl', 'carver')];
   const keptInputs = ({ body, version }: AskedParts): ProgrammeAnswer =>
     programmeForSpecs({ inputs: body as ProgrammeAnswer['inputs'], version: (version ?? 0) + 1 });
 
@@ -36,8 +38,15 @@ describe('EstimateProgramme', () => {
     readonly read?: Partial<ProgrammeAnswer>;
     readonly roles?: readonly Role[];
     readonly keep?: (parts: AskedParts) => unknown;
+    readonly now?: string;
   }
-  async function open({ read = {}, roles = ['estimator'], keep = keptInputs }: Opened = {}) {
+  async function open({
+    read = {},
+    roles = ['estimator'],
+    keep = keptInputs,
+    // Before the workshop opens on the first day of the plan.
+    now = '2027-01-04T07:00:00Z',
+  }: Opened = {}) {
     globalThis.ResizeObserver = StillObserver;
     jest.spyOn(HTMLElement.prototype, 'clientWidth', 'get').mockReturnValue(1200);
     jest.spyOn(HTMLElement.prototype, 'clientHeight', 'get').mockReturnValue(600);
@@ -50,9 +59,9 @@ describe('EstimateProgramme', () => {
         programmeForSpecs({ plan: body as ProgrammeAnswer['plan'], version: (version ?? 0) + 1 }),
       solveProgramme: () => ({ id: 's', state: 'done', plan: stands.plan }),
     });
-    const now = { provide: NOW, useValue: () => new Date('2027-01-04T09:00:00Z') };
+    const time = { provide: NOW, useValue: () => new Date(now) };
     const starter = { provide: PLANNING_STARTER, useValue: () => Promise.resolve(new PlanningHereForSpecs()) };
-    TestBed.configureTestingModule({ providers: [words, provideRouter([]), server.provider, starter, now] });
+    TestBed.configureTestingModule({ providers: [words, provideRouter([]), server.provider, starter, time] });
     signIn(roles);
     fixture = TestBed.createComponent(EstimateProgramme, {
       bindings: [
@@ -186,6 +195,70 @@ describe('EstimateProgramme', () => {
     await settle();
     await press('How this lot is worked');
     expect(spoken(element().querySelector('app-lot-form'))).toContain('Portions');
+  });
+
+  const choose = async (name: string) => {
+    const task = [...element().querySelectorAll('g.task')].find((one) =>
+      one.getAttribute('aria-label')?.startsWith(name),
+    );
+    task?.dispatchEvent(new MouseEvent('click', { bubbles: true }));
+    await settle();
+  };
+  const keptHands = () => server.of('keepProgramme').map(({ body }) => (body as ProgrammeInputs).hands);
+  const keepHands = () => press('Keep it so', element().querySelector('app-task-hands') as Element);
+
+  it('plans nothing before now, whenever the page was opened', async () => {
+    await open({ now: '2027-01-04T15:07:00Z', read: { plan: null, dates: null } });
+    await press('Plan it');
+    await press('Keep this plan');
+    const [{ body }] = server.of('keepPlan');
+    const { tasks, from_minutes } = body as NonNullable<ProgrammeAnswer['plan']>;
+    expect([from_minutes, Math.min(...tasks.map(({ start_minutes }) => start_minutes))]).toEqual([907, 907]);
+  });
+
+  it('says at once that nothing can be put into the past, and changes nothing', async () => {
+    await open({ now: '2027-01-04T15:07:00Z' });
+    await choose('Lay');
+    const at = element().querySelector('#task-at') as HTMLInputElement;
+    at.value = '2027-01-04T10:00';
+    at.closest('form')?.dispatchEvent(new Event('submit'));
+    await settle();
+    expect(spoken(element())).toContain('Lay would begin in the past.');
+    expect([server.of('keepPlan'), server.of('keepProgramme')]).toEqual([[], []]);
+  });
+
+  it('keeps that one step takes two at once, and so the carving, each by itself', async () => {
+    const read = { request: { ...stands.request, people: [...stands.request.people, ...further] } };
+    await open({ read, keep: (parts) => ({ ...keptInputs(parts), ...read }) });
+    await choose('Burnish');
+    await type('Hands it takes at once', '2');
+    await keepHands();
+    await choose('Carving');
+    expect(spoken(element().querySelector('app-task-hands'))).toContain(
+      'For all carving of this member by this grade.',
+    );
+    await type('Hands it takes at once', '2');
+    await keepHands();
+    expect(keptHands()).toEqual([
+      [{ workId: 'legs/burnish', crew: 2 }],
+      [
+        { workId: 'legs/burnish', crew: 2 },
+        { workId: 'carve', crew: 2 },
+      ],
+    ]);
+  });
+
+  it('says beside the entry that there are too few hands, and takes an entry back where it is emptied', async () => {
+    await open({ read: { inputs: { ...stands.inputs, hands: [{ workId: 'legs/burnish', crew: 2 }] } } });
+    await choose('Burnish');
+    await type('Hands it takes at once', '3');
+    await keepHands();
+    expect(spoken(element().querySelector('app-task-hands .complaint'))).toBe(
+      'Burnish takes 3 people of Gilder at once, and there are 2.',
+    );
+    await type('Hands it takes at once', '');
+    await keepHands();
+    expect(keptHands()).toEqual([[]]);
   });
 
   it('says why there is no plan at a time nobody works, and changes nothing', async () => {

@@ -116,7 +116,7 @@ export class EstimateProgramme {
   });
   /** What becomes impossible, said while a task is still being moved. */
   protected readonly consequences = computed(() => {
-    const [moved, plan, request] = [this.moved(), this.store.plan(), this.store.answer()?.request];
+    const [moved, plan, request] = [this.moved(), this.store.plan(), this.store.request()];
     return moved && plan && request ? movedConsequences(plan, request, moved) : undefined;
   });
 

@@ -1,6 +1,7 @@
 import { programme } from '#shared/programme/programme';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
-import { movedConsequences, pinnedRequest } from './pinned-request';
+import { requestFrom } from '#shared/programme/request-from';
+import { isPast, movedConsequences, pinnedRequest } from './pinned-request';
 
 const hours = [{ start_minutes: 480, end_minutes: 1020 }];
 const task = (id: string, handsOn_minutes: number) => ({
@@ -44,6 +45,14 @@ describe('A task moved elsewhere', () => {
     [1100, 'programme-breaks-hours', 'when nobody works'],
   ])('at minute %d breaks %s: %s', (start_minutes, code) => {
     expect(codes(start_minutes)[0]).toContain(code);
+  });
+
+  it('may not begin before the moment it is planned from, and that is all that is said of it', () => {
+    const now = requestFrom(request, 480 + 60 + 250);
+    const moved = movedConsequences(plan, now, { taskId: 'Lay', start_minutes: 480 + 60 + 240 });
+    expect(moved.impossible.map(({ code, about }) => [code, about])).toEqual([['programme-breaks-past', 'Lay']]);
+    expect(moved.follows).toEqual([]);
+    expect(isPast(480 + 60 + 250, now)).toBe(false);
   });
 
   it('is planned round once it is pinned', () => {

@@ -1,14 +1,13 @@
 import { Injectable, computed, inject } from '@angular/core';
 import { compareDays } from '#shared/calendar/add-days';
-import { overtime_percent } from '#shared/programme/cost-of-remedy';
 import { dayOfMinutes } from '#shared/programme/programme-frame';
 import type { Programme } from '#shared/programme/programme-plan';
-import type { WordCode } from '#shared/words/word-code';
 import { Formats } from '../../core/formats/formats';
 import { Words } from '../../core/formats/words';
 import { idleReasons } from './idle-reasons';
 import { ProgrammePlanning } from './programme-planning';
 import { ProgrammeStore } from './programme-store';
+import type { CostedRemedy } from './remedy-costs';
 import { TaskWords } from './task-words';
 
 const mostIdle = 5;
@@ -72,14 +71,15 @@ export class PlanWords {
   });
   /** What was tried: where it helps when it would be ready and, for those who see cost, what it costs more. */
   readonly helps = computed(() =>
-    (this.planning.remedies() ?? []).map(({ code, values, plan, cost_minor }) => {
+    (this.planning.remedies() ?? []).map((remedy) => {
+      const { code, values, plan } = remedy;
       const at = this.moment(plan.finish_minutes);
       const [way, ready] = [this.words.say(code, this.named(values)), $localize`Ready on ${at ?? ''}:moment:.`];
-      return at ? [way, ready, ...this.costOf(code, cost_minor)].join(' ') : [way, $localize`This does not help.`].join(' ');
+      return at ? [way, ready, ...this.costOf(remedy)].join(' ') : [way, $localize`This does not help.`].join(' ');
     }),
   );
 
-  private costOf(code: WordCode, cost_minor: number | null): string[] {
+  private costOf({ code, cost_minor, overtime_percent }: CostedRemedy): string[] {
     if (cost_minor === null) return [];
     if (cost_minor === 0) return [$localize`It costs the workshop no more.`];
     const amount = this.formats.money(Math.abs(cost_minor));

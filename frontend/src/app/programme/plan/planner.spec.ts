@@ -14,7 +14,15 @@ class TestWorker extends EventTarget {
 }
 
 const plan = (finish_minutes: number): Programme => ({
-  ...{ status: 'feasible', tasks: [], start_minutes: 0, finish_minutes, lowerBound_minutes: 0, gap: 0 },
+  ...{
+    status: 'feasible',
+    tasks: [],
+    from_minutes: 0,
+    start_minutes: 0,
+    finish_minutes,
+    lowerBound_minutes: 0,
+    gap: 0,
+  },
   ...{ plans: 1, findings: [], cycle: [] },
 });
 const question = { request: {} as ProgrammeRequest, search: {}, seconds: 5 };

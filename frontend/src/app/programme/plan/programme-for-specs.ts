@@ -42,7 +42,7 @@ export function programmeForSpecs(change: Partial<ProgrammeAnswer> = {}): Progra
     ...{ estimateId, version: 2, marks: [], request, items, plan, isCurrent: true, broken: [], hold: null },
     inputs: {
       ...{ direction: 'forward', day: '2027-01-04', climate: null, choice: [], inHand_days: 2 },
-      ...{ lots: [], pins: [], approvals: [] },
+      ...{ lots: [], hands: [], pins: [], approvals: [] },
     },
     ...{ firstDay: frame.firstDay, timeZone: frame.timeZone, startsAt: new Date(frame.startsAt_ms).toISOString() },
     ...{ approvals: [], otherSizes: [], findings: [] },

@@ -1,6 +1,7 @@
 import { TestBed } from '@angular/core/testing';
 import { signIn, words } from '../../../test/sign-in';
 import { AnsweringForSpecs } from '../answering-for-specs';
+import { NOW } from '../../core/now';
 import { Planner } from './planner';
 import { PlanningHereForSpecs } from './planning-here-for-specs';
 import { PLANNING_STARTER } from './planning-starter';
@@ -11,21 +12,25 @@ import { asItIs, WhatIfComparison } from './what-if-comparison';
 
 const stands = programmeForSpecs();
 
+const rates = ['carver', 'gilder'].map((gradeId) => ({ gradeId, costPerHour: '30.00' }));
+
 async function opened(read = stands, worker: () => EventTarget = () => new PlanningHereForSpecs()) {
   const { firstDay, startsAt, timeZone, request, items } = read;
   const server = new AnsweringForSpecs({
     readProgramme: () => read,
     readShop: () => ({ content: { people: [] } }),
     readWhatIf: () => ({
-      ...{ firstDay, startsAt, timeZone, items, findings: [], rates: [], setUp_hours: 0, digits: 2 },
+      ...{ firstDay, startsAt, timeZone, items, findings: [], rates, setUp_hours: 0, digits: 2, overtime_percent: 40 },
       // Asked on the third day, so that all of it would begin only then.
       request: { ...request, start_minutes: 3 * 1440 },
       ...{ cost_minor: 100_000, costDifference_minor: 0, gross_minor: 150_000, grossDifference_minor: 0 },
     }),
   });
   const starter = { provide: PLANNING_STARTER, useValue: () => Promise.resolve(worker()) };
+  // Before the workshop opens on the first day of the plan.
+  const time = { provide: NOW, useValue: () => new Date('2027-01-04T07:00:00Z') };
   const own = [ProgrammeStore, Planner, ProgrammePlanning, WhatIfComparison];
-  TestBed.configureTestingModule({ providers: [words, server.provider, starter, ...own] });
+  TestBed.configureTestingModule({ providers: [words, server.provider, starter, time, ...own] });
   signIn(['estimator']);
   TestBed.inject(ProgrammeStore).open(read.estimateId, 0);
   for (let turn = 0; turn < 4; turn += 1) {

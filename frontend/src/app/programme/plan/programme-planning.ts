@@ -5,7 +5,7 @@ import type { Programme } from '#shared/programme/programme-plan';
 import type { Finding } from '#shared/words/finding';
 import { Notices } from '../../core/problems/notices';
 import { ProblemError } from '../../core/problems/problem-error';
-import { pinnedRequest } from './pinned-request';
+import { isPast, pinnedRequest } from './pinned-request';
 import { Planner, PlanningStopped } from './planner';
 import { ProgrammeClient } from './programme-client';
 import { ProgrammeStore } from './programme-store';
@@ -46,18 +46,18 @@ export class ProgrammePlanning {
 
   /** Plans all of it in the browser. */
   async plan(movesLittle: boolean): Promise<void> {
-    const answer = this.store.answer();
-    if (!answer) return;
-    const question = { request: answer.request, search: this.store.search(movesLittle), seconds };
+    const request = this.store.request();
+    if (!request) return;
+    const question = { request, search: this.store.search(movesLittle), seconds };
     const plan = await this.worked(() => this.planner.plan(question));
     if (plan) this.take(plan, null);
   }
 
   /** Plans round a task put elsewhere, or set free; nothing else moves that need not. True where it can be. */
   async place(taskId: string, start_minutes: number | null): Promise<boolean> {
-    const [answer, plan, inputs] = [this.store.answer(), this.store.plan(), this.store.withPin(taskId, start_minutes)];
-    if (!answer || !plan || !inputs) return false;
-    const request = pinnedRequest(answer.request, { taskId, start_minutes });
+    const [asked, plan, inputs] = [this.store.request(), this.store.plan(), this.store.withPin(taskId, start_minutes)];
+    if (!asked || !plan || !inputs || isPast(start_minutes, asked)) return false;
+    const request = pinnedRequest(asked, { taskId, start_minutes });
     const question = { request, search: { previous: plan }, seconds: replanSeconds };
     const found = await this.worked(() => this.planner.plan(question));
     return found ? this.take(found, inputs) : false;
@@ -65,14 +65,18 @@ export class ProgrammePlanning {
 
   /** Tries what would help the task that finds no time, other sizes of its lot among it, or all of it where it comes too late, and reckons what that costs. */
   async help(): Promise<void> {
-    const [answer, about] = [this.store.answer(), this.findings().find(({ about }) => about)?.about];
-    if (!answer) return;
+    const [answer, request, about] = [
+      this.store.answer(),
+      this.store.request(),
+      this.findings().find(({ about }) => about)?.about,
+    ];
+    if (!answer || !request) return;
     const lotId = answer.items.find(({ taskId }) => taskId === about)?.lotId ?? '';
     const sizes = answer.otherSizes.filter((size) => size.lotId === lotId);
     const remedies = await this.unlessStopped(() =>
       about === undefined
-        ? this.planner.remediesOfAll(answer.request, this.store.search(false))
-        : this.planner.remedies(answer.request, about, sizes),
+        ? this.planner.remediesOfAll(request, this.store.search(false))
+        : this.planner.remedies(request, about, sizes),
     );
     if (!remedies) return;
     await this.told(async () => this.ways.set(await this.costs.of(answer, lotId, remedies)));

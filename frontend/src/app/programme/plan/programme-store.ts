@@ -3,14 +3,16 @@ import { addDays } from '#shared/calendar/add-days';
 import {
   instantOf,
   minutesBetween,
+  minutesFrom,
   minutesOf,
   minutesOfDay,
   type ProgrammeFrame,
 } from '#shared/programme/programme-frame';
 import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import type { Programme } from '#shared/programme/programme-plan';
-import type { ProgrammeSearch } from '#shared/programme/programme-request';
+import type { ProgrammeRequest, ProgrammeSearch } from '#shared/programme/programme-request';
 import { programmeSchema, type ProgrammeAnswer } from '#shared/programme/programme-schema';
+import { requestFrom } from '#shared/programme/request-from';
 import { mergedValues } from '#shared/rate-cards/merged-values';
 import { shiftedPlan } from '#shared/programme/shifted-plan';
 import { NOW } from '../../core/now';
@@ -66,6 +68,12 @@ export class ProgrammeStore {
     const frame = this.frame();
     return frame && minutesOf(this.now().toISOString(), frame);
   });
+
+  /** What is planned from now on: nothing that has not happened starts earlier. */
+  request(): ProgrammeRequest | undefined {
+    const [answer, frame] = [this.answer(), this.frame()];
+    return answer && frame && requestFrom(answer.request, minutesFrom(this.now().toISOString(), frame));
+  }
 
   /** Reads it; a further version of the estimate is another programme. */
   open(estimateId: string, version: number): void {

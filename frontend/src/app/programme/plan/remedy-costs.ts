@@ -10,6 +10,8 @@ import { asItIs, frameOfWhatIf } from './what-if-comparison';
 /** A remedy with what it costs the workshop beyond the estimate, in minor units; null for those who see no cost, and where it has no plan. */
 export interface CostedRemedy extends Remedy {
   readonly cost_minor: number | null;
+  /** The premium overtime was reckoned at. */
+  readonly overtime_percent: number;
 }
 
 /** Reckons what remedies cost, by the rates of the card and, for another size, by the estimate worked on it; asks for nothing where cost may not be seen. */
@@ -19,14 +21,16 @@ export class RemedyCosts {
   private readonly session = inject(Session);
 
   async of(answer: ProgrammeAnswer, lotId: string, remedies: readonly Remedy[]): Promise<readonly CostedRemedy[]> {
-    if (!this.session.may('owner', 'estimator')) return remedies.map((remedy) => ({ ...remedy, cost_minor: null }));
+    if (!this.session.may('owner', 'estimator'))
+      return remedies.map((remedy) => ({ ...remedy, cost_minor: null, overtime_percent: 0 }));
     const asIs = await this.client.whatIf(answer.estimateId, asItIs);
-    const { rates, setUp_hours, digits } = asIs;
-    const known = { request: answer.request, frame: frameOfWhatIf(asIs), rates, setUp_hours, digits };
+    const { rates, setUp_hours, digits, overtime_percent } = asIs;
+    const known = { request: answer.request, frame: frameOfWhatIf(asIs), rates, setUp_hours, digits, overtime_percent };
     const costed: CostedRemedy[] = [];
     for (const remedy of remedies) {
       const sizeDifference_minor = await this.sizeDifference(answer, lotId, remedy);
-      costed.push({ ...remedy, cost_minor: costOfRemedy(remedy, { ...known, sizeDifference_minor }) });
+      const cost_minor = costOfRemedy(remedy, { ...known, sizeDifference_minor });
+      costed.push({ ...remedy, cost_minor, overtime_percent });
     }
     return costed;
   }

@@ -3,11 +3,13 @@ import { MatButton } from '@angular/material/button';
 import type { RibbonTask } from '../ribbon/ribbon-lot';
 import { clockOfMinutes, minutesOfClock } from './minutes-of-clock';
 import { ProgrammeStore } from './programme-store';
+import { TaskHands } from './task-hands';
+import { taskWork } from './task-work';
 
 /** The chosen task: its whole story, and its time to be typed, pinned and set free. */
 @Component({
   selector: 'app-task-panel',
-  imports: [MatButton],
+  imports: [MatButton, TaskHands],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @let one = task();
@@ -22,6 +24,9 @@ import { ProgrammeStore } from './programme-store';
       <div class="actions no-print">
         <button matButton type="button" (click)="lotAsked.emit()" i18n>How this lot is worked</button>
       </div>
+    }
+    @for (work of works(); track work.workId) {
+      <app-task-hands class="no-print" [work]="work" />
     }
     @if (one.isMovable) {
       <form class="row no-print" (submit)="$event.preventDefault(); put(at.value)">
@@ -79,6 +84,12 @@ export class TaskPanel {
   readonly freed = output();
   readonly closed = output();
 
+  /** The work whose hands may be entered: of what may still be planned, for who may plan it. */
+  protected readonly works = computed(() => {
+    const answer = this.store.answer();
+    const work = answer && this.task().isMovable ? taskWork(answer, this.task().id) : null;
+    return work ? [work] : [];
+  });
   protected readonly told = computed(() => this.task().story.slice(1));
   protected readonly clock = computed(() => {
     const frame = this.store.frame();

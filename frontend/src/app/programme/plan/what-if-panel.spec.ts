@@ -4,6 +4,7 @@ import { programme } from '#shared/programme/programme';
 import { personForSpecs } from '#shared/programme/request-for-specs';
 import type { WhatIf } from '#shared/programme/what-if';
 import { signIn, words } from '../../../test/sign-in';
+import { NOW } from '../../core/now';
 import { AnsweringForSpecs, buttonIn, spoken, type AskedParts } from '../answering-for-specs';
 import { PLANNING_STARTER } from './planning-starter';
 import { PlanningHereForSpecs } from './planning-here-for-specs';
@@ -34,7 +35,17 @@ describe('WhatIfPanel', () => {
     const { request, items, firstDay, startsAt, timeZone } = answer;
     const lags = request.lags.map((lag) => (climate && lag.fromTaskId === 'gesso' ? { ...lag, least: 2880 } : lag));
     return {
-      ...{ firstDay, startsAt, timeZone, items, findings: [], rates: [], setUp_hours: 0, digits: 2 },
+      ...{
+        firstDay,
+        startsAt,
+        timeZone,
+        items,
+        findings: [],
+        rates: [],
+        setUp_hours: 0,
+        digits: 2,
+        overtime_percent: 50,
+      },
       request: { ...request, lags, people: [...request.people, ...further] },
       ...{ cost_minor: isOther ? 112_000 : 100_000, costDifference_minor: isOther ? 12_000 : 0 },
       ...{ gross_minor: 150_000, grossDifference_minor: 0 },
@@ -47,8 +58,9 @@ describe('WhatIfPanel', () => {
       readShop: () => ({ content: { people: [] } }),
       readWhatIf: whatIf,
     });
+    const time = { provide: NOW, useValue: () => new Date('2027-01-04T07:00:00Z') };
     const starter = { provide: PLANNING_STARTER, useValue: () => Promise.resolve(new PlanningHereForSpecs()) };
-    TestBed.configureTestingModule({ providers: [words, server.provider, starter, ProgrammeStore] });
+    TestBed.configureTestingModule({ providers: [words, server.provider, starter, time, ProgrammeStore] });
     signIn(['estimator']);
     TestBed.inject(ProgrammeStore).open(answer.estimateId, 0);
     fixture = TestBed.createComponent(WhatIfPanel, {

@@ -1,5 +1,6 @@
 import type { LotInput } from '#shared/programme/programme-inputs';
 import type { ProgrammeAnswer } from '#shared/programme/programme-schema';
+import { workIdOf } from '#shared/programme/work-id-of';
 import { groupedBy } from '#shared/units/grouped-by';
 
 /** A lot that is coated, how it is worked, and what bounds that. */
@@ -37,6 +38,8 @@ function workedLot(lotId: string, items: readonly Item[], { request, inputs }: P
   const ids = new Set(items.map(({ taskId }) => taskId));
   const tasks = request.tasks.filter(({ id, crew }) => ids.has(id) && crew > 0);
   const [{ lot, piece }] = items;
+  const entered = new Set(inputs.hands.map(({ workId }) => workId));
+  const ownHands = new Set(items.filter((item) => entered.has(workIdOf(item))).map(({ taskId }) => taskId));
   const held = request.placeHolds.find(({ fromTaskId }) => ids.has(fromTaskId));
   const input = inputs.lots.find((one) => one.lotId === lotId) ?? null;
   // A lot that takes no place is asked for one again; racks stand before benches.
@@ -44,7 +47,8 @@ function workedLot(lotId: string, items: readonly Item[], { request, inputs }: P
   return {
     ...{ lotId, name: lot, piece, input },
     portions: Math.max(1, ...items.map(({ portions }) => portions)),
-    crew: Math.max(1, ...tasks.map(({ crew }) => crew)),
+    // What a single step takes is entered with that step, and says nothing of the others.
+    crew: Math.max(1, ...tasks.filter(({ id }) => !ownHands.has(id)).map(({ crew }) => crew)),
     mostPeople: Math.max(1, ...tasks.map(({ mostPeople }) => mostPeople)),
     places: held?.amount ?? 0,
     hasWindows: request.lags.some(({ most, fromTaskId }) => most !== null && ids.has(fromTaskId)),

@@ -10,6 +10,7 @@ const day = [
 export const shopForSpecs = (): ShopContent => ({
   hours: [day, day, day, day, day, [], []],
   productiveShare_percent: 80,
+  overtime_percent: 50,
   days: [],
   climates: [],
   places: [{ id: id(1), name: 'Long rack', kind: 'rack', capacity: 2 }],

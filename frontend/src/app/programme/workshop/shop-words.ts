@@ -8,6 +8,7 @@ import { weekdayNames } from './weekday-names';
 const lineNames: Readonly<Record<string, string>> = {
   hours: $localize`Hours`,
   productiveShare_percent: $localize`Productive share of the hours, %`,
+  overtime_percent: $localize`Overtime costs more, %`,
   climates: $localize`Air by month`,
   days: $localize`Closed and extra days`,
   people: $localize`People`,
