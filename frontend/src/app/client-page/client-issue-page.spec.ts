@@ -66,7 +66,7 @@ describe('ClientIssuePage', () => {
     const programme = { startsOn: '2026-05-04', finishesOn: '2026-06-02', offeredOn: '2026-06-04', workingDays: 21 };
     const visit = await ClientVisit.begin(clientIssue({ programme }));
     expect(visit.text).toContain(
-      'Work starts on 4 May 2026 at the earliest and goes on until 2 Jun 2026, 21 working days. Offered for 4 Jun 2026.',
+      'Work starts on 4 May 2026 at the earliest and goes on until 2 Jun 2026; the workshop is open on 21 days of that time. Offered for 4 Jun 2026.',
     );
     expect(visit.element.querySelector('.bar .muted')?.textContent).toContain('ready by');
     await visit.choose('Oil gilding');

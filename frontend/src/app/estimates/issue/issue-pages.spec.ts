@@ -306,7 +306,8 @@ describe('The pages of issues', () => {
       read = { dates: { ...days, assumptions } };
       await open(IssueViewPage, view, ['office']);
       const dates = spoken(element().querySelector('app-frozen-dates'));
-      for (const part of ['9 Mar 2026', '17 Apr 2026', '24 Apr 2026', 'open on 30 days of that time']) expect(dates).toContain(part);
+      for (const part of ['9 Mar 2026', '17 Apr 2026', '24 Apr 2026', 'open on 30 days of that time'])
+        expect(dates).toContain(part);
       expect(element().querySelectorAll('app-frozen-dates li')).toHaveLength(2);
     });
 
