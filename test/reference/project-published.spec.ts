@@ -11,8 +11,8 @@ import published from './published-networks.json';
  * 5.1 and 1.2 seconds for the two of twenty, among the longest of that set.
  */
 const projectOf = ({ durations, demands, lags }: (typeof published)[number]): Project => ({
-  activities: durations.map((duration, at) => ({ duration, demands: demands.map((ofResource) => ofResource[at]!) })),
-  lags: lags.map(([from, least, to]) => ({ from: from! - 1, to: to! - 1, least: least! })),
+  activities: durations.map((duration, at) => ({ duration, demands: demands.map((ofResource) => ofResource[at]) })),
+  lags: lags.map(([from, least, to]) => ({ from: from - 1, to: to - 1, least: least })),
   capacities: demands.map(() => 5),
 });
 
