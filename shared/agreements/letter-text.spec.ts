@@ -82,4 +82,54 @@ describe('A filled letter', () => {
       }),
     );
   });
+
+  // Ways into markup as OWASP's notes on filter evasion collect them (ASVS 1.3.1, 1.3.5).
+  it.each([
+    '<script>alert(1)</script>',
+    '<SCRIPT SRC=//evil.example/x.js></SCRIPT>',
+    '<<script>alert(1);//<</script>',
+    '<script\n>alert(1)</script\n>',
+    '<scr<script>ipt>alert(1)</scr</script>ipt>',
+    '"><script>alert(1)</script>',
+    `'><script>alert(1)</script>`,
+    '</p><script>alert(1)</script><p>',
+    '<img src=x onerror=alert(1)>',
+    '<img/src="x"/onerror=alert(1)>',
+    '<IMG """><SCRIPT>alert(1)</SCRIPT>">',
+    '<svg onload=alert(1)>',
+    '<svg><script>alert(1)</script></svg>',
+    '<math><mtext></table><img src=x onerror=alert(1)>',
+    '<body onload=alert(1)>',
+    '<iframe src="javascript:alert(1)"></iframe>',
+    '<iframe srcdoc="<script>alert(1)</script>">',
+    '<object data="data:text/html,<script>alert(1)</script>"></object>',
+    '<embed src="data:image/svg+xml,<svg onload=alert(1)>">',
+    '<a href="javascript:alert(1)">x</a>',
+    '<a href="data:text/html;base64,PHNjcmlwdD4=">x</a>',
+    '<form action="//evil.example"><input onfocus=alert(1) autofocus>',
+    '<details open ontoggle=alert(1)>',
+    '<video><source onerror=alert(1)>',
+    '<meta http-equiv="refresh" content="0;url=javascript:alert(1)">',
+    '<base href="//evil.example/">',
+    '<link rel=stylesheet href=//evil.example/x.css>',
+    `<style>@import '//evil.example/x.css'</style>`,
+    '<template><script>alert(1)</script></template>',
+    '[x](javascript:alert(1)) ![x](x"onerror="alert(1))',
+  ])('holds %j as text, in the words of the workshop and in a value', (payload) => {
+    const plain = (html: string) => html.replace(/<\/?p>|<br>/g, '');
+    const unescaped = (html: string) =>
+      plain(html.replace(/<br>/g, '\n'))
+        .replace(/&lt;/g, '<')
+        .replace(/&gt;/g, '>')
+        .replace(/&quot;/g, '"')
+        .replace(/&#0?39;/g, "'")
+        .replace(/&amp;/g, '&');
+    for (const { html } of [
+      filledLetter({ subject: 's', text: payload }, {}),
+      filledLetter({ subject: 's', text: '{client}' }, { client: payload }),
+    ]) {
+      expect(plain(html)).not.toMatch(/[<>"']/);
+      expect(unescaped(html)).toBe(payload);
+    }
+  });
 });

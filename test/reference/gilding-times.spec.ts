@@ -3,6 +3,8 @@ import { sizeStrength } from '#shared/buildups/size-strength';
 import { startBuildUps } from '#shared/buildups/start-buildups';
 import { zoneForSpecs as zone } from '#shared/buildups/zone-for-specs';
 import { zoneMaterials } from '#shared/buildups/zone-materials';
+import { needsSeal } from '#shared/leaf/leaf-findings';
+import { startLeaf } from '#shared/leaf/start-leaf';
 
 const buildUp = (id: string): BuildUp => {
   const found = startBuildUps.buildUps.find((one) => one.id === id);
@@ -127,6 +129,18 @@ describe('start build-ups lie inside what others published', () => {
     for (const id of ['silver-water', 'silver-oil', 'composition']) {
       expect(buildUp(id).steps.some(({ kind, optional }) => kind === 'seal' && !optional)).toBe(true);
     }
+  });
+
+  // Eytzinger, as above: what of the leaf on offer a seal is asked for.
+  it('leaf of silver, composition and gold under 22 carat needs a seal, finer gold does not', () => {
+    const sealed = startLeaf.products.filter(needsSeal).map(({ metal, carat }) => `${metal} ${carat ?? ''}`.trim());
+    expect([...new Set(sealed)].sort()).toEqual(['composition', 'gold 12', 'gold 18', 'silver']);
+    const [first] = startLeaf.products;
+    expect([21.9, 22, 23.5].map((carat) => needsSeal({ ...first, metal: 'gold', carat }))).toEqual([
+      true,
+      false,
+      false,
+    ]);
   });
 
   // Suppliers' instructions.
