@@ -4,6 +4,7 @@ import { dirname, join } from 'node:path';
 import { fileURLToPath, pathToFileURL } from 'node:url';
 import { buildServer } from './build-server.mjs';
 import { compressPages } from './compress-pages.mjs';
+import { joinChunks } from './join-chunks.mjs';
 import { prepareFirstVisit } from './client-first-visit.mjs';
 import { isCurrent, stampOf, writeStamp } from './source-stamp.mjs';
 
@@ -19,6 +20,7 @@ const parts = [
     sources: inRoot(
       ...['frontend', 'shared', 'fonts', 'angular.json', 'package-lock.json', 'tsconfig.json'],
       ...['backend/bin/build.mjs', 'backend/bin/client-first-visit.mjs', 'backend/bin/compress-pages.mjs'],
+      'backend/bin/join-chunks.mjs',
     ),
     build: buildPages,
   },
@@ -33,7 +35,8 @@ const parts = [
 
 /** The workshop's pages, and then those of clients, which lie in a folder of theirs. */
 async function buildPages() {
-  await run(process.execPath, [ng, 'build', 'web', '--progress=false']);
+  await run(process.execPath, [ng, 'build', 'web', '--progress=false', '--stats-json']);
+  await joinChunks(join(root, 'dist/web'));
   await run(process.execPath, [ng, 'build', 'client', '--progress=false', '--stats-json']);
   prepareFirstVisit(join(root, 'dist/web/client-files'));
   await compressPages(join(root, 'dist/web'));
