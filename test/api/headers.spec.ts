@@ -61,6 +61,14 @@ test('a page has a nonce of its own, in its policy and in its text', async () =>
   expect(second.text).not.toContain(nonce);
 });
 
+test('a page without the application may be dressed, and nothing more', async () => {
+  const { headers, text } = await get('/api/reference');
+  expect(headers['content-security-policy']).toBe(
+    "default-src 'none'; style-src 'self'; font-src 'self'; base-uri 'none'; frame-ancestors 'none'",
+  );
+  expect(text).toContain('<link rel="stylesheet" href="/plain.css">');
+});
+
 test('the policy of a page allows our own files only', async () => {
   const { headers } = await get('/');
   const policy = headers['content-security-policy'] ?? '';

@@ -1,6 +1,6 @@
 import type { RequestHandler } from 'express';
 import type { CaughtMail, MailCatcher } from '../mail/mail-catcher';
-import { escaped, plainPage } from './plain-page';
+import { escaped, sendPlainPage } from './plain-page';
 
 /** Enclosed files by their names alone, and HTML as it is written: nothing that came in a mail is run here. */
 function shown({ at, headers, text, html, enclosures }: CaughtMail): string {
@@ -20,8 +20,6 @@ export const caughtMails =
   (catcher: MailCatcher): RequestHandler =>
   async (_request, response) => {
     const mails = await catcher.mails();
-    response
-      .set('Cache-Control', 'no-store')
-      .type('html')
-      .send(plainPage('Mail', mails.map(shown).join('') || '<p>No mail yet.</p>'));
+    response.set('Cache-Control', 'no-store');
+    sendPlainPage(response, 'Mail', mails.map(shown).join('') || '<p>No mail yet.</p>');
   };

@@ -17,6 +17,15 @@ export const pagePolicy = (nonce: string): string =>
     'trusted-types angular angular#bundler default',
   ].join('; ');
 
+/** What a page without the application may do: be dressed in our style sheet and letters, nothing more. */
+export const plainPolicy = [
+  "default-src 'none'",
+  "style-src 'self'",
+  "font-src 'self'",
+  "base-uri 'none'",
+  "frame-ancestors 'none'",
+].join('; ');
+
 /** The headers of every answer; what is not a page may do nothing at all in a browser. */
 export const safetyHeaders = (): RequestHandler =>
   helmet({
