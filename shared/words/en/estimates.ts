@@ -18,17 +18,17 @@ export const estimates = {
   'measuring-rule-carved-each-side': 'carved work counted double, each side',
   'measuring-rule-narrow-girth': 'narrow members at a girth of 6 or 12 inches',
   'measuring-rule-weighted': '{worth} times plain work',
-  'paid-quantity-differs': 'The quantity is not what its measures come to.',
   'measuring-rule-weighted-each': 'special work, each at so many times plain',
+  'paid-quantity-differs': 'The quantity is not what its measures come to.',
   'alternative-empty':
     'The alternative “{name}” has nothing in it and leaves nothing out. It stays off the papers until it says what is done otherwise.',
   'alternatives-overlap':
     'The alternatives “{first}” and “{second}” may be chosen together, and both take the place of “{part}”. Put them in one group, so that the client takes one or the other.',
   'card-start-prices':
     'The rate card still has the {of, select, hours {rates of hours} other {prices of leaf}} every workshop starts from, which were meant in {start}, and here they are taken as {currency}. Enter your own and put the card in force.',
-  'currency-issued':
   'card-other-currency':
     'The {of, select, hours {rates of hours} other {prices of leaf}} of the rate card were entered in {start}, and here they are taken as {currency}. Enter them anew in a copy of the card and put it in force.',
+  'currency-issued':
     'Estimates have been issued in the currency there is, and what is issued never changes. For another currency, found another workshop.',
   'history-estimate-currency':
     'Estimate {number} was carried over to {currency} with the workshop; its prices stayed the numbers they were',
