@@ -84,7 +84,11 @@ type Load = BoardAnswer['load'][number];
       height: 36px;
       padding: 4px 8px;
       border-radius: 5px;
-      background: color-mix(in srgb, var(--gold) calc(var(--full) * 55%), var(--tint));
+      // By night the gold stays darker, or the figure on a full week could not be read (4.9 : 1).
+      background: light-dark(
+        color-mix(in srgb, var(--gold) calc(var(--full) * 55%), var(--tint)),
+        color-mix(in srgb, var(--gold) calc(var(--full) * 40%), var(--tint))
+      );
       text-align: right;
     }
 

@@ -3,6 +3,7 @@ import { cellAt } from '#shared/rate-cards/tables/cell-at';
 import type { CardColumn } from '#shared/rate-cards/tables/card-table';
 import type { CellPath } from '#shared/rate-cards/tables/cell-path';
 import { valueAt } from '#shared/rate-cards/tables/value-at';
+import { Formats } from '../../core/formats/formats';
 import { Entry } from '../../ui/field/entry';
 import { Field } from '../../ui/field/field';
 import { CardStore } from '../card/card-store';
@@ -19,6 +20,7 @@ import { CellWriting, type Cell } from './cell-writing';
 export class CardEntry {
   private readonly store = inject(CardStore);
   private readonly writing = inject(CellWriting);
+  private readonly formats = inject(Formats);
 
   readonly column = input.required<CardColumn>();
   readonly path = input.required<CellPath>();
@@ -39,7 +41,12 @@ export class CardEntry {
     return unread ?? (content ? this.writing.text(this.cell(), content) : '');
   });
   /** What stands there for those who only read it. */
-  protected readonly known = computed(() => [this.text(), this.text() ? this.unit() : ''].filter(Boolean).join(' '));
+  protected readonly known = computed(() => {
+    const [text, unit] = [this.text(), this.unit()];
+    // The sign of a share stands where the locale has it.
+    if (text && unit === '%') return this.formats.percent(1).replace('1', text);
+    return [text, text ? unit : ''].filter(Boolean).join(' ');
+  });
   protected readonly choices = computed(() => {
     const content = this.store.content();
     const choices = content && this.writing.choices(this.cell(), content);
