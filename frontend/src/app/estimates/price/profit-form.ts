@@ -36,7 +36,8 @@ import { RiskTable } from './risk-table';
     form {
       display: grid;
       gap: 12px 16px;
-      grid-template-columns: repeat(2, minmax(0, 1fr));
+      // A choice says a whole sentence, a figure stands beside it.
+      grid-template-columns: minmax(0, 3fr) minmax(0, 2fr);
       align-items: start;
     }
 
