@@ -1,12 +1,14 @@
+import type { DecimalText } from '#shared/money/decimal';
 import { guardedText } from '#shared/documents/guarded-text';
 
-/** What a cell of a list holds: a text somebody may have typed, or a figure. */
-export type CsvCell = string | number;
+/** What a cell of a list holds: a text somebody may have typed, a figure, or a decimal amount with all its digits (-120.00). */
+export type CsvCell = string | number | { readonly amount: DecimalText };
 
 const byteOrderMark = '\ufeff';
 
 function cellText(cell: CsvCell): string {
   if (typeof cell === 'number') return String(cell);
+  if (typeof cell === 'object') return cell.amount;
   const text = guardedText(cell);
   return /[",\r\n]/.test(text) ? `"${text.replace(/"/g, '""')}"` : text;
 }

@@ -19,6 +19,8 @@ export interface LedgerEntry {
   readonly number: string;
   /** Why, where somebody had to say so; for the workshop and its accountant, never for the client. */
   readonly note: string;
+  /** Of money that came or went: by what way, and the numbers of the invoices it is for; for the journal alone. */
+  readonly paid?: { readonly way: 'bank' | 'cash' | 'card'; readonly invoices: readonly string[] };
   /** ISO 4217. */
   readonly currency: string;
   readonly net_minor: MinorUnits;

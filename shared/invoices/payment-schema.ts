@@ -125,7 +125,12 @@ export const journalSchema = z.strictObject({
   currencies: z.array(
     z.strictObject({
       currency: z.string(),
-      entries: z.array(z.strictObject({ ...entryShape, note: z.string() })),
+      entries: z.array(
+        z.strictObject({
+          ...{ ...entryShape, note: z.string() },
+          paid: z.strictObject({ way: z.enum(paymentWays), invoices: z.array(z.string()) }).optional(),
+        }),
+      ),
       totals: z.array(z.strictObject({ kind: z.enum(ledgerKinds), count: z.int(), ...totalShape })),
     }),
   ),

@@ -214,6 +214,18 @@ describe('what is owed', () => {
       .parse(binary as never);
     expect((paper.body as Buffer).subarray(0, 5).toString()).toBe('%PDF-');
     const journal = (await api.as('office').call(readJournal, { query: wide })).body as Journal;
+    const paid = journal.currencies[0].entries.find(
+      ({ kind, clientId }) => kind === 'payment' && clientId === sample.clientId,
+    );
+    const { number } = await readBack(api.ours, sample.invoiceId);
+    expect(paid).toMatchObject({ amount_minor: -2_000, paid: { way: 'bank', invoices: [number] } });
+    const list = await api
+      .as('office')
+      .call(readJournalList, { query: wide })
+      .buffer(true)
+      .parse(binary as never);
+    const lines = (list.body as Buffer).toString('utf8').split('\r\n');
+    expect(lines.find((one) => one.includes(`Bank transfer,${number}`))).toMatch(/,EUR,0\.00,0\.00,0\.00,-20\.00$/);
     const credit = owed.items.reduce((sum, one) => sum + one.credit_minor, 0);
     expect(journal.currencies[0].totals.reduce((sum, { amount_minor }) => sum + amount_minor, 0)).toBe(
       owed.open_minor - credit,
@@ -274,8 +286,8 @@ describe('what is owed', () => {
       .split('\r\n')
       .filter((row) => row.includes('Together'));
     expect(together.map((row) => row.split(',').filter(Boolean))).toEqual([
-      ['Totals', 'Together', 'SEK', '100', '20', '0', '120'],
-      ['Totals', 'Together', 'EUR', '100', '20', '0', '100'],
+      ['Totals', 'Together', 'SEK', '100.00', '20.00', '0.00', '120.00'],
+      ['Totals', 'Together', 'EUR', '100.00', '20.00', '0.00', '100.00'],
     ]);
     const paper = await own
       .call(readStatementPaper, call)

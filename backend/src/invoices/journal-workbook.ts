@@ -35,6 +35,8 @@ const heads = ({ say }: PaperWords): string[] => [
   say('journal-head-number'),
   say('journal-head-client'),
   say('journal-head-note'),
+  say('journal-head-way'),
+  say('journal-head-paid'),
   say('journal-head-currency'),
   say('journal-head-net'),
   say('journal-head-tax'),
@@ -43,13 +45,21 @@ const heads = ({ say }: PaperWords): string[] => [
 ];
 
 /** Where the four amounts stand. */
-const amountColumns = 'GHIJ';
+const amountColumns = 'IJKL';
+
+const wayWords = { bank: 'journal-way-bank', cash: 'journal-way-cash', card: 'journal-way-card' } as const;
+
+const minorsOf = (amounts: Amounts): MinorUnits[] => [
+  ...[amounts.net_minor, amounts.tax_minor, amounts.rounding_minor, amounts.amount_minor],
+];
+
+/** With all decimals of the currency, as books are read into other programs. */
+const decimalsOf = (amounts: Amounts, currency: string): CsvCell[] =>
+  minorsOf(amounts).map((minor) => ({ amount: textOf(minor, currencyDigits(currency)) }));
 
 /** The exact decimal as a figure: at most 13 digits and its decimals, which a figure of this kind holds without loss. */
 const figuresOf = (amounts: Amounts, currency: string): number[] =>
-  [amounts.net_minor, amounts.tax_minor, amounts.rounding_minor, amounts.amount_minor].map((minor) =>
-    Number(textOf(minor, currencyDigits(currency))),
-  );
+  minorsOf(amounts).map((minor) => Number(textOf(minor, currencyDigits(currency))));
 
 function together({ totals }: JournalInCurrency): Amounts {
   const sum = (pick: (amounts: Amounts) => MinorUnits) => sumMinor(totals.map(pick));
@@ -62,23 +72,24 @@ function together({ totals }: JournalInCurrency): Amounts {
 }
 
 const entryTexts = ({ book, words }: BookInWords, entry: JournalInCurrency['entries'][number]): string[] => [
-  ...[entry.day, words.say(kindWords[entry.kind]), entry.number, entry.clientName, entry.note, book.currency],
+  ...[entry.day, words.say(kindWords[entry.kind]), entry.number, entry.clientName, entry.note],
+  ...[entry.paid ? words.say(wayWords[entry.paid.way]) : '', entry.paid?.invoices.join(', ') ?? '', book.currency],
 ];
 
 const totalTexts = ({ book, words }: BookInWords, kind: string): string[] => [
-  ...[words.say('journal-totals'), kind, '', '', '', book.currency],
+  ...[words.say('journal-totals'), kind, '', '', '', '', '', book.currency],
 ];
 
 function bookRows(written: BookInWords): CsvCell[][] {
   const { book, words } = written;
   const { currency } = book;
   return [
-    ...book.entries.map((entry) => [...entryTexts(written, entry), ...figuresOf(entry, currency)]),
+    ...book.entries.map((entry) => [...entryTexts(written, entry), ...decimalsOf(entry, currency)]),
     ...book.totals.map((total) => [
       ...totalTexts(written, words.say(kindWords[total.kind])),
-      ...figuresOf(total, currency),
+      ...decimalsOf(total, currency),
     ]),
-    [...totalTexts(written, words.say('journal-all')), ...figuresOf(together(book), currency)],
+    [...totalTexts(written, words.say('journal-all')), ...decimalsOf(together(book), currency)],
   ];
 }
 
@@ -105,7 +116,7 @@ function addTotals(sheet: Sheet, written: BookInWords, span: { from: number; to:
 function newSheet(name: string, currency: string): Sheet {
   const digits = currencyDigits(currency);
   const format = digits === 0 ? '#,##0' : `#,##0.${'0'.repeat(digits)}`;
-  const texts = [12, 14, 20, 34, 28, 10].map((width) => ({ width, format: '' }));
+  const texts = [12, 14, 20, 34, 28, 14, 24, 10].map((width) => ({ width, format: '' }));
   return new Sheet(name, [...texts, ...[14, 14, 12, 14].map((width) => ({ width, format }))]);
 }
 

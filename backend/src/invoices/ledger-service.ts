@@ -5,6 +5,7 @@ import type { LedgerEntry } from '#shared/invoices/ledger-entry';
 import { owedByAge } from '#shared/invoices/owed-by-age';
 import type { Journal, OwedInCurrency, Statement } from '#shared/invoices/payment-schema';
 import { sumMinor } from '#shared/money/sum-minor';
+import { groupedBy } from '#shared/units/grouped-by';
 import type { InvoiceRow } from './invoice-model';
 import { todayIn, type InvoiceParts } from './invoice-parts';
 import type { PaymentRow, WriteOffRow } from './payment-model';
@@ -54,11 +55,18 @@ const ofWriteOff = (row: WriteOffRow, invoice: InvoiceRow, names: Named): Ledger
   amount_minor: -row.amountMinor,
 });
 
+type Numbers = ReadonlyMap<string, readonly string[]>;
+
+const withPaid = (entry: LedgerEntry, ways: ReadonlyMap<string, PaymentRow['way']>, numbers: Numbers): LedgerEntry => {
+  const way = ways.get(entry.id);
+  return way === undefined ? entry : { ...entry, paid: { way, invoices: numbers.get(entry.id) ?? [] } };
+};
+
 const byDay = (one: LedgerEntry, other: LedgerEntry): number =>
   one.day < other.day || (one.day === other.day && one.id < other.id) ? -1 : 1;
 
 /** What a client may read of an entry: not what the workshop noted of it. */
-const toldOf = <T extends LedgerEntry>({ note: _note, currency: _currency, ...told }: T) => told;
+const toldOf = <T extends LedgerEntry>({ note: _note, currency: _currency, paid: _paid, ...told }: T) => told;
 
 const isMoving = ({ opening_minor, lines }: { opening_minor: number; lines: readonly unknown[] }): boolean =>
   opening_minor !== 0 || lines.length > 0;
@@ -105,10 +113,13 @@ export class LedgerService {
   }
 
   async journal(workshopId: string, days: Days): Promise<Journal> {
-    const entries = await this.entries(workshopId, days);
+    const entries = await this.paid(workshopId, await this.entries(workshopId, days), days);
     const currencies = (await this.apart(workshopId, entries)).map(({ currency, rows }) => ({
       currency,
-      entries: rows.map(({ currency: _currency, ...entry }) => entry),
+      entries: rows.map(({ currency: _currency, paid, ...entry }) => ({
+        ...entry,
+        ...(paid ? { paid: { way: paid.way, invoices: [...paid.invoices] } } : {}),
+      })),
       totals: journalTotals(rows),
     }));
     return { ...days, currencies };
@@ -119,6 +130,29 @@ export class LedgerService {
     const names = new Map<string, string>();
     for (const id of new Set(clientIds)) names.set(id, (await this.parts.jobs.client(workshopId, id)).name);
     return names;
+  }
+
+  /** The entries of money with the way it came and the invoices it is for, what was taken back already counted. */
+  private async paid(workshopId: string, entries: readonly LedgerEntry[], days: Days): Promise<LedgerEntry[]> {
+    const payments = await this.parts.payments.receivedBetween(workshopId, days);
+    const ids = payments.map(({ id }) => id);
+    const shares = await this.parts.payments.sharesOf(workshopId, ids);
+    const invoiceIds = [...new Set(shares.map(({ invoiceId }) => invoiceId))];
+    const invoices = await this.parts.invoices.named(workshopId, invoiceIds);
+    const held = (paymentId: string, invoiceId: string) =>
+      sumMinor(
+        shares
+          .filter((one) => one.paymentId === paymentId && one.invoiceId === invoiceId)
+          .map((one) => one.amountMinor),
+      );
+    const own = groupedBy(shares, ({ paymentId }) => paymentId);
+    const numbersOf = (id: string) => {
+      const paidIds = new Set((own.get(id) ?? []).map(({ invoiceId }) => invoiceId));
+      return invoices.filter((row) => paidIds.has(row.id) && held(id, row.id) > 0).map(({ number }) => number ?? '');
+    };
+    const numbers = new Map(ids.map((id) => [id, numbersOf(id)]));
+    const ways = new Map(payments.map(({ id, way }) => [id, way]));
+    return entries.map((entry) => withPaid(entry, ways, numbers));
   }
 
   private async apart<T extends { readonly currency: string }>(workshopId: string, rows: readonly T[]) {

@@ -32,6 +32,7 @@ export const invoices = {
   'invoice-period-turned': 'The period ends before it begins.',
   'invoice-account-wrong': 'This IBAN does not add up. Please compare it with the bank’s.',
   'invoice-vat-form': 'A VAT number begins with the two letters of its country.',
+  'invoice-country-unknown': 'No country has the letters {country}. Please choose one from the list.',
 
   // Drafts
   'invoice-is-issued': 'Invoice {number} has been issued. Issued papers stay as they are; a credit note corrects them.',
@@ -42,6 +43,8 @@ export const invoices = {
   'invoice-no-contract': 'Nothing of this job has been accepted yet, so there is nothing to invoice from.',
   'invoice-claim-unknown': 'That part is not in the contract.',
   'invoice-claim-taken': 'This is invoiced already, or not due yet.',
+  'invoice-nothing-to-credit':
+    'What this variation takes away is credited against an invoice of the job, and of none anything is left to credit. Issue its next invoice first.',
   'invoice-credits-credit': 'A credit note corrects an invoice, not another credit note.',
   'invoice-credit-over': 'Of invoice {number} no more than {left_minor} is left to credit.',
   'invoice-credit-nothing': 'Nothing of invoice {number} is left to credit.',
@@ -106,6 +109,8 @@ export const invoices = {
   'invoice-line-first-release': 'First half of what was held back, {number}',
   'invoice-line-second-release': 'Second half of what was held back, {number}',
   'invoice-line-whole-stage': 'the whole of it',
+  'invoice-line-again': '{number}, {title}: again, what was credited of {invoice}',
+  'invoice-line-taken-away': 'Taken away by variation {number}, {title}',
 
   // The paper
   'paper-invoice': 'Invoice',
@@ -180,6 +185,8 @@ export const invoices = {
   'journal-head-number': 'Number',
   'journal-head-client': 'Client',
   'journal-head-note': 'Note',
+  'journal-head-way': 'Way',
+  'journal-head-paid': 'For invoices',
   'journal-head-currency': 'Currency',
   'journal-head-net': 'Net',
   'journal-head-tax': 'Tax',
@@ -191,5 +198,8 @@ export const invoices = {
   'journal-kind-refund': 'Refund',
   'journal-kind-dispute': 'Disputed payment',
   'journal-kind-write-off': 'Written off',
+  'journal-way-bank': 'Bank transfer',
+  'journal-way-cash': 'Cash',
+  'journal-way-card': 'Card',
   'journal-all': 'Together',
 } as const;

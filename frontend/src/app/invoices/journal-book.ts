@@ -4,7 +4,9 @@ import { RouterLink } from '@angular/router';
 import type { JournalInCurrency } from '#shared/invoices/payment-schema';
 import { sumMinor } from '#shared/money/sum-minor';
 import { Formats } from '../core/formats/formats';
-import { ledgerEntryNames, ledgerKindNames } from './invoice-names';
+import { ledgerEntryNames, ledgerKindNames, paymentWayNames } from './invoice-names';
+
+type Paid = NonNullable<JournalInCurrency['entries'][number]['paid']>;
 
 /** Everything that moved an account in one currency, with the sums of each kind before it. */
 @Component({
@@ -29,6 +31,11 @@ export class JournalBook {
     amount_minor: sumMinor(this.totals().map(({ amount_minor }) => amount_minor)),
   }));
   protected readonly isRounded = computed(() => this.totals().some(({ rounding_minor }) => rounding_minor !== 0));
+
+  protected paidBy({ way, invoices }: Paid): string {
+    const name = paymentWayNames[way];
+    return invoices.length === 0 ? name : $localize`${name}:way:, for ${invoices.join(', ')}:invoices:`;
+  }
 
   protected full(amount_minor: number): string {
     return this.formats.amountIn(this.book().currency, amount_minor);
