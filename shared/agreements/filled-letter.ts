@@ -24,16 +24,20 @@ const written = (template: string, values: LetterValues, write: Writing): string
     .join('');
 
 const asLink = (address: string): string =>
-  /^https?:\/\//.test(address) ? `<a href="${escaped(address)}">${escaped(address)}</a>` : escaped(address);
+  /^https?:\/\/\S+$/.test(address) ? `<a href="${escaped(address)}">${escaped(address)}</a>` : escaped(address);
 
-function htmlOf(template: string, values: LetterValues): string {
-  const body = written(template, values, (text, name) => (name === 'link' ? asLink(text) : escaped(text)));
-  return body
+const inParagraphs = (body: string): string =>
+  body
     .trim()
     .split(/\r?\n(?:[ \t]*\r?\n)+/)
     .map((paragraph) => `<p>${paragraph.split(/\r?\n/).join('<br>')}</p>`)
     .join('\n');
-}
+
+const htmlOf = (template: string, values: LetterValues): string =>
+  inParagraphs(written(template, values, (text, name) => (name === 'link' ? asLink(text) : escaped(text))));
+
+/** Plain words as HTML: paragraphs and line breaks as they were written, a line that is an address as a link, nothing as markup. */
+export const paragraphsOf = (text: string): string => inParagraphs(text.split('\n').map(asLink).join('\n'));
 
 /** Fills the words of a letter: values go in as text, never as markup and never as further placeholders; an unknown one is left empty. */
 export function filledLetter(words: LetterText, values: LetterValues): FilledLetter {

@@ -1,4 +1,4 @@
-import { filledLetter, type FilledLetter, type LetterValues } from '#shared/agreements/filled-letter';
+import { filledLetter, paragraphsOf, type FilledLetter, type LetterValues } from '#shared/agreements/filled-letter';
 import type { LetterText } from '#shared/agreements/letter-complaints';
 import type { LetterKind } from '#shared/agreements/letter-kinds';
 import type { Accounts, WorkshopSettingsRow } from '../accounts';
@@ -59,8 +59,9 @@ export class LetterService {
     const own = values(letterFigures(workshop));
     const subject = words(`notice-${kind}-subject`, own);
     const text = words(`notice-${kind}-text`, own);
+    const html = letterHtml(workshop, { subject, body: paragraphsOf(text) });
     for (const to of await this.readers(workshop))
-      await this.parts.mailbox.post(workshopId, { to, subject, text, ...more });
+      await this.parts.mailbox.post(workshopId, { to, subject, text, html, ...more });
   }
 
   /** A letter with these words as it would leave, filled with examples. */

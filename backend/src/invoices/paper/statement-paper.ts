@@ -1,3 +1,4 @@
+import { compareDays } from '#shared/calendar/add-days';
 import type { SnapshotWorkshop } from '#shared/estimates/snapshot';
 import type { Statement } from '#shared/invoices/payment-schema';
 import {
@@ -86,29 +87,34 @@ function accountBlocks(pdf: Pdf, { statement, workshop }: StatementOnPaper): Blo
   });
 }
 
+/** Nothing is known of days ahead: a statement reaches to the day it is made on at most. */
+function untilToday(paper: StatementOnPaper): StatementOnPaper {
+  const { statement, madeOn } = paper;
+  const to = compareDays(statement.to, madeOn) > 0 ? madeOn : statement.to;
+  return { ...paper, statement: { ...statement, to } };
+}
+
+const titleOf = ({ statement: { clientName, from, to } }: StatementOnPaper, words: PaperWords): string =>
+  words.say('paper-statement-title', { client: clientName, from: words.day(from), to: words.day(to) });
+
 function blocks(pdf: Pdf, paper: StatementOnPaper, words: PaperWords): Block[] {
   const { statement, workshop, logo, address, madeOn } = paper;
-  const { clientName, from, to } = statement;
   return [
     letterheadBlock({ workshop, logo: printableLogo(pdf, logo), words }),
     addressBlock(pdf, {
-      address: [clientName, ...address],
+      address: [statement.clientName, ...address],
       particulars: [[words.say('paper-date'), words.day(madeOn)]],
     }),
-    textBlock(
-      pdf,
-      words.say('paper-statement-title', { client: clientName, from: words.day(from), to: words.day(to) }),
-      { style: textStyles.title, tag: 'H1' },
-    ),
+    textBlock(pdf, titleOf(paper, words), { style: textStyles.title, tag: 'H1' }),
     ...accountBlocks(pdf, paper),
   ];
 }
 
 /** The account of a client on paper. */
-export function statementPaper(paper: StatementOnPaper): Promise<Buffer> {
+export function statementPaper(asked: StatementOnPaper): Promise<Buffer> {
+  const paper = untilToday(asked);
   const words = paperWords(paper.workshop);
-  const { clientName, from, to } = paper.statement;
-  const title = words.say('paper-statement-title', { client: clientName, from: words.day(from), to: words.day(to) });
+  const title = titleOf(paper, words);
   return finishedPaper({
     facts: {
       ...{ title, author: paper.workshop.name, subject: words.say('paper-statement'), language: words.language },
