@@ -4,7 +4,6 @@ import { pageOf, pageQuery } from '#shared/actor/page-schema';
 import { invoiceSchema } from '#shared/invoices/invoice-schema';
 import { oneInvoice } from '#shared/invoices/invoices-endpoints';
 import {
-  checkoutSchema,
   paymentEntrySchema,
   paymentSchema,
   refundEntrySchema,
@@ -72,17 +71,6 @@ export const writeOff = endpoint({
   body: writeOffEntrySchema,
   idempotent: true,
   answers: { cost: invoiceSchema },
-});
-
-export const askCheckout = endpoint({
-  name: 'askCheckout',
-  summary: 'Ask the payment service where a payment by card stands, and record what it says',
-  method: 'post',
-  path: '/api/checkouts/:checkoutId/state',
-  callers: ['owner', 'office'],
-  params: z.strictObject({ checkoutId: identifier }),
-  inSteps: true,
-  answers: sameForPriced(checkoutSchema),
 });
 
 export const takePaymentEvent = endpoint({

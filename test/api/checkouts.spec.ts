@@ -9,7 +9,6 @@ import {
 } from '#shared/client-page/client-invoices-endpoints';
 import type { Checkout, Journal, Payment } from '#shared/invoices/payment-schema';
 import {
-  askCheckout,
   listPayments,
   listUnknownPaymentEvents,
   refundPayment,
@@ -45,7 +44,7 @@ async function begun(sample?: { clientId: string; invoiceId: string }) {
 }
 
 const ask = async (checkoutId: string): Promise<Checkout> =>
-  (await api.as('office').call(askCheckout, { params: { checkoutId } })).body as Checkout;
+  api.app.invoices.reading.checkout(await api.app.invoices.checkouts.ask(api.ours.id, checkoutId));
 const openOf = async (invoiceId: string) => (await readBack(api.ours, invoiceId)).open_minor;
 const paymentsOf = async (clientId: string): Promise<Payment[]> =>
   ((await api.as('office').call(listPayments, { query: { clientId } })).body as { items: Payment[] }).items;
@@ -197,9 +196,7 @@ describe('a payment by card', () => {
     await api.platform.database.execute("UPDATE checkouts SET session_id = 'cs_test_gone' WHERE id = :checkoutId", {
       checkoutId,
     });
-    const response = await api.as('office').call(askCheckout, { params: { checkoutId } });
-    expect(response.status).toBe(503);
-    expect(response.headers['retry-after']).toBe('10');
+    await expect(ask(checkoutId)).rejects.toMatchObject({ kind: 'unavailable', more: { retryAfter_seconds: 10 } });
   });
 });
 

@@ -9,7 +9,6 @@ import {
   sendStatement,
 } from '#shared/invoices/owed-endpoints';
 import {
-  askCheckout,
   listPayments,
   listUnknownPaymentEvents,
   recordPayment,
@@ -67,9 +66,6 @@ export const paymentRoutes = (parts: Parts): Route[] => {
     ),
     mount(writeOff, async ({ actor, params, body }) =>
       reading.read(await recording.writeOff(actor, params.invoiceId, body)),
-    ),
-    mount(askCheckout, async ({ actor, params }) =>
-      reading.checkout(await checkouts.ask(actor.workshopId, params.checkoutId)),
     ),
     mount(listUnknownPaymentEvents, async () => ({ items: await checkouts.unknownEvents() })),
     mount(takePaymentEvent, async ({ signed }) => {

@@ -36,13 +36,6 @@ const keyed = () => ({ key: randomUUID() });
 const settingsVersion = async (workshop: TestWorkshop, api: Api) =>
   (await api.app.invoices.settings.read(workshop.id)).version;
 
-/** A checkout as the client of an invoice begins it. */
-async function checkoutOf(workshop: TestWorkshop, api: Api) {
-  const { invoiceId } = await sampleInvoice(workshop);
-  const payer = { accessId: newId(), name: `${workshop.mark} payer`, email: '', returnUrl: () => 'http://127.0.0.1/' };
-  return api.platform.database.transaction(() => api.app.invoices.checkouts.begin(workshop.id, invoiceId, payer));
-}
-
 export const invoicesRows: MatrixRows = {
   readInvoiceSettings: { prepare: () => ({}) },
   keepInvoiceSettings: {
@@ -98,6 +91,12 @@ export const invoicesRows: MatrixRows = {
     prepare: async (workshop, api) => {
       const { jobId } = await oneContract(workshop, api);
       return { params: { jobId } };
+    },
+  },
+  listDueStages: {
+    prepare: async (workshop, api) => {
+      await oneContract(workshop, api);
+      return {};
     },
   },
   beginStageInvoice: {
@@ -159,9 +158,6 @@ export const invoicesRows: MatrixRows = {
       ...keyed(),
     }),
     history: 'history-written-off',
-  },
-  askCheckout: {
-    prepare: async (workshop, api) => ({ params: { checkoutId: (await checkoutOf(workshop, api)).id } }),
   },
   // Whoever is no payment service cannot sign, so a call as the matrix makes it is refused; checkouts.spec.ts has the signed ones.
   takePaymentEvent: { prepare: () => ({ body: { id: 'evt_unsigned' } }), status: 400 },
