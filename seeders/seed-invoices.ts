@@ -14,7 +14,9 @@ function invoicesOfThen(app: App, platform: Platform): Invoices {
   const { accounts, audit, jobs, agreements } = app;
   const clock = { now: () => new Date(platform.clock.now().getTime() - sixWeeks_milliseconds) };
   const contract = agreements.contracts.contract.bind(agreements.contracts);
-  return openInvoices({ ...platform, clock }, { accounts, audit, jobs, contract, letters: agreements.letters });
+  const openContracts = agreements.contracts.open.bind(agreements.contracts);
+  const agreed = { contract, openContracts, letters: agreements.letters };
+  return openInvoices({ ...platform, clock }, { accounts, audit, jobs, ...agreed });
 }
 
 async function sayWho({ invoices }: App, owner: Actor): Promise<void> {

@@ -14,6 +14,7 @@ import * as clientVisits from '#shared/client-page/visits-endpoints';
 import * as estimates from '#shared/estimates/estimates-endpoints';
 import * as issues from '#shared/estimates/issues-endpoints';
 import * as contractAccounts from '#shared/invoices/contract-account-endpoints';
+import * as dueStages from '#shared/invoices/due-stages-endpoints';
 import * as invoices from '#shared/invoices/invoices-endpoints';
 import * as owed from '#shared/invoices/owed-endpoints';
 import * as payments from '#shared/invoices/payments-endpoints';
@@ -45,6 +46,7 @@ export const endpoints: readonly Endpoint[] = [
   letters,
   invoices,
   contractAccounts,
+  dueStages,
   payments,
   owed,
   clientVisits,

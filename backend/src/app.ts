@@ -31,7 +31,8 @@ export interface App {
 function openTowardsClients(platform: Platform, needs: Pick<App, 'accounts' | 'audit' | 'jobs' | 'estimates'>) {
   const agreements = openAgreements(platform, needs);
   const contract = agreements.contracts.contract.bind(agreements.contracts);
-  const invoices = openInvoices(platform, { ...needs, contract, letters: agreements.letters });
+  const openContracts = agreements.contracts.open.bind(agreements.contracts);
+  const invoices = openInvoices(platform, { ...needs, contract, openContracts, letters: agreements.letters });
   const clientInvoices = openClientInvoices(platform, invoices);
   const clientPage = openClientPage({ ...needs, agreements, invoices: clientInvoices });
   return { agreements, invoices, clientPage, clientInvoices };
@@ -57,6 +58,7 @@ function openFeatures(platform: Platform) {
     papers: new PaperMaking(),
     programme: (workshopId, estimateId) => programme.programmes.frozen(workshopId, estimateId),
     agreed: (workshopId, issueIds) => towardsClients.agreements.decisions.accepted(workshopId, issueIds),
+    mustHold: (workshopId, jobId, more) => towardsClients.agreements.contracts.mustHold(workshopId, jobId, more),
   });
   const programme: ProgrammeFeature = openProgramme(platform, { accounts, audit, rateCards, jobs, estimates });
   const towardsClients = openTowardsClients(platform, { accounts, audit, jobs, estimates });

@@ -94,7 +94,8 @@ export const clientIssueSchema = z.strictObject({
     .strictObject({ startsOn: z.string(), finishesOn: z.string(), offeredOn: z.string(), workingDays: z.int() })
     .nullable(),
   cautions: z.array(findingSchema),
-  care: z.array(z.string()),
+  /** The accepted issues a variation changes. */
+  varies: z.array(z.strictObject({ number: z.string(), letter: z.string(), title: z.string() })),
   questions: z.array(questionSchema),
   decision: clientDecisionSchema.nullable(),
 });

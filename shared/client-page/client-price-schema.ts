@@ -40,7 +40,7 @@ const clientPaymentSchema = z.strictObject({
   paid_minor: minor,
 });
 
-/** What a choice comes to: lines, taxes, totals, payments and the whole weeks the work takes; nothing of how it is worked. */
+/** What a choice comes to: lines, taxes, totals, payments, the whole weeks the work takes, and its care; nothing of how it is worked. */
 export const clientPriceSchema = z.strictObject({
   choice: z.array(z.uuid()),
   lines: z.array(clientLineSchema),
@@ -53,6 +53,7 @@ export const clientPriceSchema = z.strictObject({
   gross_minor: minor,
   payments: z.array(clientPaymentSchema),
   weeks: z.int(),
+  care: z.array(z.string()),
 });
 export type ClientPrice = z.infer<typeof clientPriceSchema>;
 

@@ -47,6 +47,8 @@ export const pricedIssueSummarySchema = issueSummarySchema.extend({
       gross_minor: z.int(),
     })
     .optional(),
+  /** Told where an issue is read whole: its client can take none of its alternatives, for the calculator that worked it was changed since. */
+  choicesFixed: z.boolean().optional(),
 });
 export type IssueSummary = z.infer<typeof issueSummarySchema>;
 export type PricedIssueSummary = z.infer<typeof pricedIssueSummarySchema>;

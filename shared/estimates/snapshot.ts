@@ -35,6 +35,13 @@ export interface SnapshotJob {
   readonly site: string;
 }
 
+/** An accepted issue as a variation of it speaks of it. */
+export interface SnapshotVaried {
+  readonly number: string;
+  readonly letter: string;
+  readonly title: string;
+}
+
 /** When one lot, or the carving of one member, is in work; days in the workshop's zone. */
 export interface SnapshotLotDates {
   readonly piece: string;
@@ -63,6 +70,8 @@ export interface Snapshot {
   readonly client: SnapshotClient;
   readonly job: SnapshotJob;
   readonly estimate: { readonly id: string; readonly number: string; readonly letter: string };
+  /** The accepted issues a variation changes; an estimate has none. */
+  readonly varies?: readonly SnapshotVaried[];
   /** Instant in UTC (ISO 8601), and days in the workshop's own zone. */
   readonly issuedAt: string;
   readonly issuedOn: string;

@@ -30,7 +30,6 @@ export const contractAccountSchema = z.strictObject({
       net_minor: z.int(),
       gross_minor: z.int(),
       ...sums,
-      creditedInPart_minor: z.int(),
       isComplete: z.boolean(),
       next: z.array(nextClaimSchema),
     }),

@@ -1,13 +1,9 @@
 import fc from 'fast-check';
 import type { Contract, ContractPart } from '#shared/agreements/contract';
-import {
-  claimRounding,
-  contractAccount,
-  isClaiming,
-  partAccount,
-  type ClaimingInvoice,
-} from '#shared/invoices/contract-account';
-import { claimedAmounts, type StageClaim } from '#shared/invoices/stage-claim';
+import { creditedRest, restRounding } from '#shared/invoices/claimed-again';
+import { isStanding, takenClaims, type ClaimingInvoice } from '#shared/invoices/claiming-invoice';
+import { claimRounding, contractAccount, partAccount } from '#shared/invoices/contract-account';
+import { claimedAmounts, type PlannedClaim, type StageClaim } from '#shared/invoices/stage-claim';
 import { stageLines } from '#shared/invoices/stage-lines';
 import { workedInvoice } from '#shared/invoices/worked-invoice';
 import { stagePayments } from '#shared/money/stage-payments';
@@ -35,26 +31,45 @@ const partOf = (nets: readonly (readonly [string, number])[], plan: ContractPart
 
 const plan = { deposit_percent: 30, stages_percent: [40, 40, 20], retention_percent: 5 };
 const part = partOf([['20', 1_000_00]], plan);
-const work = (from_percent: string, to_percent: string): StageClaim => ({ of: 'work', from_percent, to_percent });
+const work = (from_percent: string, to_percent: string): PlannedClaim => ({ of: 'work', from_percent, to_percent });
 
 /** The invoice of a claim as the server works it: its lines, taxed by themselves, and the rounding that is known. */
-const workedFor = (one: ContractPart, claim: StageClaim) => {
+const workedFor = (one: ContractPart, claim: PlannedClaim) => {
   const names = { work: 'Work', recovered: 'Deposit recovered', retained: 'Held back' };
   const lines = stageLines(claimedAmounts(one, claim), names, 2);
   const entered = { pricesHold: 'net', lines, allowancesCharges: [], roundsToCash: false } as const;
   return workedInvoice(entered, 'EUR', claimRounding(one, claim));
 };
 
-const issuedFor = (one: ContractPart, claim: StageClaim, before: readonly ClaimingInvoice[]): ClaimingInvoice => ({
-  ...{ invoiceId: `invoice ${before.length}`, issueId: one.issueId, claim, isIssued: true, credited_minor: 0 },
+const issuedFor = (one: ContractPart, claim: PlannedClaim, before: readonly ClaimingInvoice[]): ClaimingInvoice => ({
+  ...{ invoiceId: `invoice ${before.length}`, number: `26-${before.length}`, issueId: one.issueId, claim },
+  ...{ isIssued: true, credited_minor: 0, credited: [], nets: [] },
   due_minor: workedFor(one, claim).totals.due_minor,
 });
+
+/** The invoice of what was credited of another and is claimed again. */
+function againFor(one: ContractPart, claim: StageClaim, before: readonly ClaimingInvoice[]): ClaimingInvoice {
+  if (claim.of !== 'again') return issuedFor(one, claim, before);
+  const credited = before.find(({ invoiceId }) => invoiceId === claim.invoiceId);
+  if (!credited) throw new Error('nothing of that kind was credited');
+  const rest = creditedRest(credited, takenClaims(before));
+  const { categories, gross_minor } = taxByCategory(rest.nets);
+  const due_minor = gross_minor + restRounding(rest);
+  return { ...issuedFor(one, { of: 'deposit' }, before), claim, due_minor, nets: categories };
+}
+
+/** The same invoice, of which a credit note over so much at one rate was issued. */
+function creditedBy(one: ClaimingInvoice, net_minor: number, said = '20'): ClaimingInvoice {
+  const note = taxByCategory([{ tax: rateOf(said), net_minor }]);
+  const credited_minor = one.credited_minor + note.gross_minor;
+  return { ...one, credited_minor, credited: [...one.credited, ...note.categories] };
+}
 
 /** Every claim the plan of a part foresees, each with the payment that paper and review promise for it. */
 function promisedFor({
   gross_minor,
   plan: { stages_percent, ...held },
-}: ContractPart): (readonly [StageClaim, number])[] {
+}: ContractPart): (readonly [PlannedClaim, number])[] {
   const { deposit_minor, stages, releases_minor } = stagePayments(gross_minor, { stages_percent, ...held });
   const ends = stages_percent.map((_, at) =>
     String(
@@ -85,7 +100,7 @@ function invoicedInTurn(one: ContractPart): ClaimingInvoice[] {
   for (let step = 0; step < 40; step += 1) {
     const [next] = partAccount(one, invoices).next;
     if (!next) return invoices;
-    invoices.push(issuedFor(one, next.claim, invoices));
+    invoices.push(againFor(one, next.claim, invoices));
   }
   throw new Error('the account never ends');
 }
@@ -137,28 +152,37 @@ describe('where a part stands', () => {
     ).toEqual([work('55', '80'), work('80', '100')]);
   });
 
-  it('claims again what was credited to the last cent, and not what was credited in part', () => {
+  it('offers the whole claim anew once it was credited to the last cent, and what was credited where it was in part', () => {
     const first = issuedFor(part, work('0', '40'), []);
-    const inPart = { ...first, credited_minor: 1 };
+    const inPart = creditedBy(first, 1_00);
     const wholly = { ...first, credited_minor: first.due_minor };
-    expect(isClaiming(inPart)).toBe(true);
-    expect(partAccount(part, [inPart]).next[1].claim).toEqual(work('40', '80'));
+    expect([isStanding(inPart), isStanding(wholly)]).toEqual([true, false]);
+    expect(partAccount(part, [inPart]).next[0]).toEqual({
+      ...{ claim: { of: 'again', invoiceId: first.invoiceId }, name: first.number, net_minor: 1_00, gross_minor: 1_20 },
+    });
+    expect(partAccount(part, [inPart]).next[2].claim).toEqual(work('40', '80'));
     expect(partAccount(part, [wholly]).next[1].claim).toEqual(work('0', '40'));
     expect(partAccount(part, [wholly]).left_minor).toBe(part.gross_minor);
   });
 
-  it('is not complete while an invoice is credited in part, and says how much of it is; credited wholly, the stage is offered anew', () => {
+  it('is not complete while something credited is not claimed again, and is once it was', () => {
     const invoices = invoicedInTurn(part);
     const [, stage] = invoices;
-    const credited = (credited_minor: number) =>
-      invoices.map((one) => (one === stage ? { ...one, credited_minor } : one));
-    expect(partAccount(part, invoices)).toMatchObject({ isComplete: true, left_minor: 0, creditedInPart_minor: 0 });
-    expect(partAccount(part, credited(100_00))).toMatchObject({
-      ...{ isComplete: false, left_minor: 100_00, creditedInPart_minor: 100_00, next: [] },
-    });
-    expect(partAccount(part, credited(stage.due_minor))).toMatchObject({
-      ...{ isComplete: false, left_minor: stage.due_minor, creditedInPart_minor: 0, next: [{ claim: stage.claim }] },
-    });
+    const credited = invoices.map((one) => (one === stage ? creditedBy(one, 100_00) : one));
+    expect(partAccount(part, invoices)).toMatchObject({ isComplete: true, left_minor: 0 });
+    expect(partAccount(part, credited)).toMatchObject({ isComplete: false, left_minor: 120_00 });
+    const again = againFor(part, { of: 'again', invoiceId: stage.invoiceId }, credited);
+    expect(again.due_minor).toBe(120_00);
+    expect(partAccount(part, [...credited, again])).toMatchObject({ isComplete: true, left_minor: 0, next: [] });
+  });
+
+  it('offers no whole claim beside what of it is claimed again already, but only the rest', () => {
+    const first = issuedFor(part, work('0', '40'), []);
+    const again = againFor(part, { of: 'again', invoiceId: first.invoiceId }, [creditedBy(first, 100_00)]);
+    // All that was left of the first is credited too: 260.00 of 400.00 less deposit and retention fell due with tax.
+    const wholly = { ...creditedBy(first, 100_00), credited_minor: first.due_minor };
+    const [next] = partAccount(part, [wholly, { ...again, invoiceId: 'again' }]).next;
+    expect(next).toMatchObject({ claim: { of: 'again' }, gross_minor: first.due_minor - again.due_minor });
   });
 
   it('counts a draft as claiming, though nothing is invoiced yet', () => {
@@ -199,7 +223,7 @@ describe('the contract and its invoices', () => {
     const tiny = partOf([['25', 4]], { deposit_percent: 0, stages_percent: [12, 88], retention_percent: 0 });
     const invoices = invoicedInTurn(tiny);
     expect(invoices.map(({ due_minor }) => due_minor)).toEqual([1, 4]);
-    expect(workedFor(tiny, invoices[0].claim)).toMatchObject({ lines: [{ price: '0.00' }], rounding_minor: 1 });
+    expect(workedFor(tiny, work('0', '12'))).toMatchObject({ lines: [{ price: '0.00' }], rounding_minor: 1 });
   });
 
   it('fall due as paper and review promise, claim by claim, whatever the contract, its taxes and its plan', () => {
@@ -254,7 +278,7 @@ describe('the contract and its invoices', () => {
     const invoices = invoicedInTurn(part);
     const [, stage] = invoices;
     const credited = invoices.map((one) => (one === stage ? { ...one, credited_minor: one.due_minor } : one));
-    const anew = issuedFor(part, stage.claim, credited);
+    const anew = againFor(part, stage.claim, credited);
     expect(dueOf([...credited, anew]) - stage.due_minor).toBe(part.gross_minor);
   });
 });

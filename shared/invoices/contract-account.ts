@@ -1,5 +1,7 @@
 import type { Contract, ContractPart } from '#shared/agreements/contract';
-import { claimedAmounts, claimedDue, type StageClaim } from '#shared/invoices/stage-claim';
+import { creditedRest } from '#shared/invoices/claimed-again';
+import { takenClaims, type ClaimingInvoice } from '#shared/invoices/claiming-invoice';
+import { claimedAmounts, claimedDue, type PlannedClaim, type StageClaim } from '#shared/invoices/stage-claim';
 import { uncoveredWork, type WorkSpan } from '#shared/invoices/uncovered-work';
 import { cumulativePercents } from '#shared/money/cumulative-parts';
 import { D, type MinorUnits } from '#shared/money/decimal';
@@ -7,17 +9,10 @@ import { safeMinor } from '#shared/money/safe-minor';
 import { sumMinor } from '#shared/money/sum-minor';
 import { taxByCategory } from '#shared/money/tax-by-category';
 
-/** An invoice that claims something of a part, as far as the account asks. Amounts in whole minor units, with tax. */
-export interface ClaimingInvoice {
-  readonly invoiceId: string;
-  readonly issueId: string;
-  readonly claim: StageClaim;
-  readonly isIssued: boolean;
-  readonly due_minor: MinorUnits;
-  readonly credited_minor: MinorUnits;
-}
-
-/** What may be invoiced next of a part, and what it comes to: its lines without tax, and what falls due. `name` is that of a planned stage, empty for everything else. */
+/**
+ * What may be invoiced next of a part, and what it comes to: its lines without tax, and what falls due; below nothing where a credit note
+ * gives it back. `name` is that of a planned stage, or the number of the invoice of which something credited is claimed again.
+ */
 export interface NextClaim {
   readonly claim: StageClaim;
   readonly name: string;
@@ -31,8 +26,6 @@ export interface PartAccount {
   readonly invoiced_minor: MinorUnits;
   readonly credited_minor: MinorUnits;
   readonly left_minor: MinorUnits;
-  /** Credited of invoices that stand: what they claimed is not offered again unless the rest of them is credited too. */
-  readonly creditedInPart_minor: MinorUnits;
   readonly next: readonly NextClaim[];
   /** Whether every claim is issued and nothing is left to invoice. */
   readonly isComplete: boolean;
@@ -47,10 +40,6 @@ export interface ContractAccount {
   readonly left_minor: MinorUnits;
 }
 
-/** Whether an invoice still claims: one that was credited to the last minor unit does not, what it claimed may be claimed again. */
-export const isClaiming = ({ isIssued, due_minor, credited_minor }: ClaimingInvoice): boolean =>
-  !isIssued || due_minor === 0 || due_minor !== credited_minor;
-
 const claimKey = (claim: StageClaim): string =>
   claim.of === 'work' ? `work ${claim.from_percent} ${claim.to_percent}` : claim.of;
 
@@ -58,7 +47,7 @@ const spanOf = ({ claim }: ClaimingInvoice): WorkSpan[] =>
   claim.of === 'work' ? [{ from: new D(claim.from_percent), to: new D(claim.to_percent) }] : [];
 
 /** Net and gross of the lines of a claim, taxed as an invoice of its own; what falls due differs by the rounding. */
-function linesTotals(part: ContractPart, claim: StageClaim): { net_minor: MinorUnits; gross_minor: MinorUnits } {
+function linesTotals(part: ContractPart, claim: PlannedClaim): { net_minor: MinorUnits; gross_minor: MinorUnits } {
   const { net_minor, gross_minor } = taxByCategory(
     claimedAmounts(part, claim).map(({ tax, work_minor, recovered_minor, retained_minor }) => ({
       tax,
@@ -72,11 +61,16 @@ function linesTotals(part: ContractPart, claim: StageClaim): { net_minor: MinorU
  * What the invoice of a claim is rounded by (BT-114), in minor units: tax is worked once per category on the sum of an invoice, so it may
  * differ from the tax within the payment that was promised. The rounding stands outside the tax, and what falls due is the promise.
  */
-export const claimRounding = (part: ContractPart, claim: StageClaim): MinorUnits =>
+export const claimRounding = (part: ContractPart, claim: PlannedClaim): MinorUnits =>
   safeMinor(claimedDue(part, claim) - linesTotals(part, claim).gross_minor);
 
+interface OpenClaim {
+  readonly claim: PlannedClaim;
+  readonly name: string;
+}
+
 /** The stages of the plan as far as no invoice claims them; a stage that is claimed in part is left with the rest, one that comes to nothing is left out. */
-function openWork(part: ContractPart, claiming: readonly ClaimingInvoice[]): { claim: StageClaim; name: string }[] {
+function openWork(part: ContractPart, claiming: readonly ClaimingInvoice[]): OpenClaim[] {
   const reached = cumulativePercents(part.plan.stages_percent);
   const gaps = uncoveredWork(claiming.flatMap(spanOf));
   return gaps.flatMap(({ from, to }) =>
@@ -92,33 +86,43 @@ function openWork(part: ContractPart, claiming: readonly ClaimingInvoice[]): { c
 }
 
 /** Deposit first, then the work in its order; what was held back is released once all work is invoiced (common practice, no source). */
-function openClaims(part: ContractPart, claiming: readonly ClaimingInvoice[]): { claim: StageClaim; name: string }[] {
+function openClaims(part: ContractPart, claiming: readonly ClaimingInvoice[]): OpenClaim[] {
   const taken = new Set(claiming.map(({ claim }) => claimKey(claim)));
-  const isOpen = (claim: StageClaim) => !taken.has(claimKey(claim)) && claimedAmounts(part, claim).length > 0;
+  const isOpen = (claim: PlannedClaim) => !taken.has(claimKey(claim)) && claimedAmounts(part, claim).length > 0;
   const single = (of: 'deposit' | 'first-release' | 'second-release') =>
-    [{ claim: { of } as StageClaim, name: '' }].filter(({ claim }) => isOpen(claim));
+    [{ claim: { of } as PlannedClaim, name: '' }].filter(({ claim }) => isOpen(claim));
   const work = openWork(part, claiming);
   const releases = [...single('first-release'), ...single('second-release')];
   return [...single('deposit'), ...(work.length > 0 ? work : releases)];
 }
 
+/** What was credited of invoices that stand, to be claimed again: it belongs to the contract until a variation takes it away. */
+const openAgain = (taken: readonly ClaimingInvoice[]): NextClaim[] =>
+  taken.flatMap((invoice) => {
+    const { due_minor, nets } = creditedRest(invoice, taken);
+    if (due_minor <= 0) return [];
+    const claim = { of: 'again', invoiceId: invoice.invoiceId } as const;
+    const net_minor = sumMinor(nets.map((net) => net.net_minor));
+    return [{ claim, name: invoice.number, net_minor, gross_minor: due_minor }];
+  });
+
 /** Where a part of a contract stands, given the invoices of the job; amounts in whole minor units. */
 export function partAccount(part: ContractPart, invoices: readonly ClaimingInvoice[]): PartAccount {
   const own = invoices.filter(({ issueId }) => issueId === part.issueId);
   const issued = own.filter(({ isIssued }) => isIssued);
-  const claiming = own.filter(isClaiming);
-  const next = openClaims(part, claiming).map((open) => ({
+  const taken = takenClaims(own);
+  const planned = openClaims(part, taken).map((open) => ({
     ...open,
     net_minor: linesTotals(part, open.claim).net_minor,
     gross_minor: claimedDue(part, open.claim),
   }));
+  const next = [...openAgain(taken), ...planned];
   const invoiced_minor = sumMinor(issued.map((invoice) => invoice.due_minor));
   const credited_minor = sumMinor(issued.map((invoice) => invoice.credited_minor));
   const left_minor = sumMinor([part.gross_minor, -invoiced_minor, credited_minor]);
   return {
     ...{ issueId: part.issueId, invoiced_minor, credited_minor, left_minor, next },
-    creditedInPart_minor: sumMinor(claiming.map((invoice) => invoice.credited_minor)),
-    isComplete: next.length === 0 && left_minor === 0 && claiming.every(({ isIssued }) => isIssued),
+    isComplete: next.length === 0 && left_minor === 0 && taken.every(({ isIssued }) => isIssued),
   };
 }
 

@@ -103,6 +103,7 @@ const percentText = z.string().regex(/^\d{1,3}(\.\d{1,6})?$/);
 export const stageClaimSchema = z.discriminatedUnion('of', [
   z.strictObject({ of: z.enum(['deposit', 'first-release', 'second-release']) }),
   z.strictObject({ of: z.literal('work'), from_percent: percentText, to_percent: percentText }),
+  z.strictObject({ of: z.literal('again'), invoiceId: z.uuid() }),
 ]);
 
 const findingSchema = z.strictObject({

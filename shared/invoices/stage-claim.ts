@@ -4,13 +4,13 @@ import { percentOf } from '#shared/money/percent-of';
 import { safeMinor } from '#shared/money/safe-minor';
 import type { TaxRate } from '#shared/money/tax-by-category';
 
-/**
- * What of a part of a contract one invoice claims: the deposit, the work from one share done to another (in percent of the part, planned
- * stages and valuations alike), or one of the two halves of what was held back.
- */
-export type StageClaim =
+/** What a plan of payment foresees: the deposit, work from one share done to another (in percent of the part), two halves of what was held back. */
+export type PlannedClaim =
   | { readonly of: 'deposit' | 'first-release' | 'second-release' }
   | { readonly of: 'work'; readonly from_percent: DecimalText; readonly to_percent: DecimalText };
+
+/** What one invoice claims of a part of a contract: something its plan foresees, or again what was credited of an invoice that stands. */
+export type StageClaim = PlannedClaim | { readonly of: 'again'; readonly invoiceId: string };
 
 /** What a claim comes to under one tax, without it: the work, less what is recovered of the deposit and what is held back. */
 export interface ClaimedAmount {
@@ -28,7 +28,7 @@ const between = (total_minor: MinorUnits, from_percent: DecimalText, to_percent:
 
 type Part = Pick<ContractPart, 'taxes' | 'gross_minor' | 'plan'>;
 
-function claimedOf(total_minor: MinorUnits, plan: ContractPart['plan'], claim: StageClaim) {
+function claimedOf(total_minor: MinorUnits, plan: ContractPart['plan'], claim: PlannedClaim) {
   const deposit_minor = percentOf(total_minor, String(plan.deposit_percent));
   const retention_minor = percentOf(total_minor, String(plan.retention_percent));
   const first_minor = percentOf(retention_minor, '50');
@@ -52,12 +52,12 @@ function claimedOf(total_minor: MinorUnits, plan: ContractPart['plan'], claim: S
  * What falls due of a claim, with tax, in whole minor units: the payment as paper and review promise it, out of the gross of the part, so
  * that deposit, all work and both releases are the gross to the last minor unit.
  */
-export function claimedDue({ gross_minor, plan }: Part, claim: StageClaim): MinorUnits {
+export function claimedDue({ gross_minor, plan }: Part, claim: PlannedClaim): MinorUnits {
   const { work_minor, recovered_minor, retained_minor } = claimedOf(gross_minor, plan, claim);
   return safeMinor(work_minor - recovered_minor - retained_minor);
 }
 
-function mustGoForward(claim: StageClaim): void {
+function mustGoForward(claim: PlannedClaim): void {
   if (claim.of !== 'work') return;
   const [from, to] = [new D(claim.from_percent), new D(claim.to_percent)];
   if (from.lessThan(0) || to.greaterThan(100) || !to.greaterThan(from))
@@ -68,7 +68,7 @@ function mustGoForward(claim: StageClaim): void {
  * What a claim comes to, under each tax of the part by itself, in whole minor units without tax. Deposit, all work and both releases
  * together are the part's net to the last minor unit; RangeError when work is claimed backwards or beyond 0 to 100 percent.
  */
-export function claimedAmounts(part: Part, claim: StageClaim): ClaimedAmount[] {
+export function claimedAmounts(part: Part, claim: PlannedClaim): ClaimedAmount[] {
   mustGoForward(claim);
   const amounts = part.taxes.map(({ tax, net_minor }) => ({ tax, ...claimedOf(net_minor, part.plan, claim) }));
   const some = amounts.filter(({ work_minor, recovered_minor, retained_minor }) =>

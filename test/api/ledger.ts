@@ -81,39 +81,45 @@ interface AgreedPart {
   readonly gross: number;
   readonly standing: number;
   readonly drafts: number;
-  readonly creditedInPart: number;
 }
 
 const agreedParts = `
   SELECT s.workshop_id AS workshopId, e.job_id AS jobId, s.id AS issueId, COALESCE(d.gross_minor, s.gross_minor) AS gross,
-    CAST(COALESCE(SUM(IF(i.state = 'issued', i.due_minor - i.credited_minor, 0)), 0) AS SIGNED) AS standing,
-    CAST(COALESCE(SUM(i.state = 'draft'), 0) AS SIGNED) AS drafts,
-    CAST(COALESCE(SUM(i.state = 'issued' AND i.credited_minor NOT IN (0, i.due_minor)), 0) AS SIGNED) AS creditedInPart
+    CAST(COALESCE(SUM(CASE
+      WHEN i.state <> 'issued' THEN 0
+      WHEN i.kind = 'credit-note' THEN -i.due_minor
+      ELSE i.due_minor - COALESCE((SELECT SUM(c.due_minor) FROM invoices c WHERE c.workshop_id = i.workshop_id
+        AND c.credited_invoice_id = i.id AND c.state = 'issued' AND c.claim_issue_id IS NULL), 0)
+    END), 0) AS SIGNED) AS standing,
+    CAST(COALESCE(SUM(i.state = 'draft'), 0) AS SIGNED) AS drafts
   FROM issues s
   JOIN estimates e ON e.workshop_id = s.workshop_id AND e.id = s.estimate_id
   LEFT JOIN decisions d ON d.workshop_id = s.workshop_id AND d.issue_id = s.id
-  LEFT JOIN invoices i ON i.workshop_id = s.workshop_id AND i.claim_issue_id = s.id AND i.kind = 'invoice'
+  LEFT JOIN invoices i ON i.workshop_id = s.workshop_id AND i.claim_issue_id = s.id
   WHERE s.state = 'accepted'
   GROUP BY s.workshop_id, e.job_id, s.id, d.gross_minor, s.gross_minor`;
 
 /**
  * What contracts and their invoices say that does not agree: of every accepted part, its gross = invoiced − credited + what its account says
- * is left; where no claim is open, drafted or credited in part, and wherever the account calls it complete, nothing is left.
+ * is left, where credit notes of what a variation takes away count with the variation; where no claim is open or drafted, and wherever the
+ * account calls it complete, nothing is left; and no contract is below nothing.
  */
 export async function contractFaults(app: App, database: Database): Promise<string[]> {
   const agreed = await database.select<AgreedPart>(agreedParts);
   const accounts = new Map<string, Awaited<ReturnType<App['invoices']['stages']['account']>>>();
   for (const { workshopId, jobId } of agreed)
     if (!accounts.has(jobId)) accounts.set(jobId, await app.invoices.stages.account(workshopId, jobId));
-  return agreed.flatMap(({ jobId, issueId, ...one }) => {
+  const below = [...accounts].filter(([, account]) => (account?.gross_minor ?? 0) < 0).map(([jobId]) => jobId);
+  const faults = agreed.flatMap(({ jobId, issueId, ...one }) => {
     const part = accounts.get(jobId)?.parts.find((among) => among.issueId === issueId);
     if (!part) return [`the accepted issue ${issueId} is no part of the contract of its job`];
     const left = Number(one.gross) - Number(one.standing);
-    const isDone = part.next.length === 0 && Number(one.drafts) === 0 && Number(one.creditedInPart) === 0;
+    const isDone = part.next.length === 0 && Number(one.drafts) === 0;
     return [
       ...(left === part.left_minor ? [] : [`of ${issueId} ${left} is left, not ${part.left_minor}`]),
       ...((isDone || part.isComplete) && left !== 0 ? [`all of ${issueId} is invoiced, but for ${left}`] : []),
       ...(isDone === part.isComplete ? [] : [`${issueId} is ${part.isComplete ? '' : 'not '}called complete`]),
     ];
   });
+  return [...faults, ...below.map((jobId) => `the contract of ${jobId} is below nothing`)];
 }

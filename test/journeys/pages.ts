@@ -80,6 +80,7 @@ export const memberPages: Readonly<Record<string, AddressesOf>> = {
   OwedPage: () => ['/accounts'],
   InvoicesPage: () => ['/accounts/invoices', '/accounts/invoices?show=drafts'],
   PaymentsPage: () => ['/accounts/payments'],
+  DueStagesPage: () => ['/accounts/due'],
   JournalPage: () => ['/accounts/journal?from=2020-01-01&to=2099-12-31'],
   InvoiceSettingsPage: () => ['/accounts/settings'],
   NewInvoicePage: () => ['/accounts/invoices/new'],

@@ -1,6 +1,5 @@
 import type { ClientIssue } from '#shared/client-page/client-issue-schema';
 import { buildUpsUsed } from '#shared/estimates/buildups-used';
-import { careCodes } from '#shared/documents/care-codes';
 import { clientCautions } from '#shared/documents/client-cautions';
 import type { Figures } from '#shared/estimates/figures';
 import { isEmptyAlternative } from '#shared/estimates/is-empty-alternative';
@@ -8,19 +7,6 @@ import type { Snapshot } from '#shared/estimates/snapshot';
 import { presentBuildUp, presentClientAlternative } from './client-alternatives-presenter';
 import { presentClientPieces } from './client-pieces-presenter';
 import { presentClientPrice } from './client-price-presenter';
-
-function careOf({ card, draft, figures }: Snapshot): string[] {
-  const zones = draft.members.flatMap((member) => member.zones);
-  return careCodes({
-    systems: card.buildUps.buildUps
-      .filter(({ id }) => zones.some((zone) => zone.buildUpId === id))
-      .map((one) => one.system),
-    metals: card.leaf.products
-      .filter(({ id }) => figures.leaf.some((used) => used.productId === id))
-      .map((one) => one.metal),
-    isOutdoors: draft.settings.place !== 'indoors',
-  });
-}
 
 /** What is written on the issue, as it is. */
 function textsOf(snapshot: Snapshot) {
@@ -54,7 +40,7 @@ export function presentClientFrozen(snapshot: Snapshot, alternatives: ReadonlyMa
     programme: programmeOf(snapshot),
     isDrying: figures.dry.lots.some((lot) => lot.drying_minutes > 0),
     cautions: clientCautions({ findings: figures.findings, isRestoration: draft.settings.restoration }),
-    care: careOf(snapshot),
+    varies: (snapshot.varies ?? []).map(({ number, letter, title }) => ({ number, letter, title })),
   };
 }
 

@@ -1,9 +1,10 @@
 import type { ClientPrice } from '#shared/client-page/client-price-schema';
+import { careCodes } from '#shared/documents/care-codes';
 import { paymentRows } from '#shared/documents/payment-rows';
 import { chosenDraft } from '#shared/estimates/chosen-draft';
 import type { Draft } from '#shared/estimates/draft';
-import type { PriceLine, PriceTax } from '#shared/estimates/price/price';
 import { measuresOf } from '#shared/estimates/price/measured-work';
+import type { PriceLine, PriceTax } from '#shared/estimates/price/price';
 import type { Snapshot } from '#shared/estimates/snapshot';
 import { countUp } from '#shared/money/settled';
 
@@ -33,6 +34,20 @@ function taxOf(
   return { ...named, code, percent, net_minor, tax_minor };
 }
 
+/** How the piece is cared for, by what it is finished with as it was chosen: nothing of what was not. */
+function careOf({ card, figures }: Snapshot, { members, settings }: Draft): string[] {
+  const zones = members.flatMap((member) => member.zones);
+  return careCodes({
+    systems: card.buildUps.buildUps
+      .filter(({ id }) => zones.some((zone) => zone.buildUpId === id))
+      .map((one) => one.system),
+    metals: card.leaf.products
+      .filter(({ id }) => figures.leaf.some((used) => used.productId === id))
+      .map((one) => one.metal),
+    isOutdoors: settings.place !== 'indoors',
+  });
+}
+
 /** What an issue comes to as it was chosen: the client's side of its figures, and nothing else. */
 export function presentClientPrice(snapshot: Snapshot): ClientPrice {
   const { figures, choice } = snapshot;
@@ -45,7 +60,9 @@ export function presentClientPrice(snapshot: Snapshot): ClientPrice {
     ...{ subtotal_minor, discount_minor, net_minor, tax_minor, gross_minor },
     discount_percent: discount?.way === 'percent' ? Number(discount.amount) : null,
     taxes: taxes.map((tax) => taxOf(snapshot, tax)),
-    payments: paymentRows(stages, figures.stages).rows,
+    // What is taken away is given back, and never paid in stages.
+    payments: gross_minor < 0 ? [] : paymentRows(stages, figures.stages).rows,
     weeks: countUp(figures.tally.weeks),
+    care: careOf(snapshot, draft),
   };
 }

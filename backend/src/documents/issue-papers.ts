@@ -18,34 +18,40 @@ const media: Readonly<Record<Paper, string>> = {
   'leaf-order.csv': 'text/csv; charset=utf-8',
 };
 
-async function bytesOf(snapshot: Snapshot, logo: Buffer | null): Promise<Readonly<Record<Paper, Buffer>>> {
-  const { card, workshop } = snapshot;
-  const digits = currencyDigits(workshop.currency);
-  const lines = leafOrderLines(leafNeeds(snapshot), { card: card.leaf, digits });
-  const words = paperWords(workshop);
-  return {
-    'estimate.pdf': await estimatePaper(snapshot, logo),
-    'estimate.xlsx': await estimateWorkbook(snapshot),
-    'leaf-order.pdf': await leafOrderPaper(snapshot, { lines, logo }),
-    'leaf-order.csv': leafOrderList(lines, { words, currency: workshop.currency, digits }),
-  };
-}
+const orderLines = (snapshot: Snapshot) =>
+  leafOrderLines(leafNeeds(snapshot), {
+    card: snapshot.card.leaf,
+    digits: currencyDigits(snapshot.workshop.currency),
+  });
 
-function paperFile({ estimate }: Snapshot, paper: Paper, bytes: Buffer): PaperFile {
+/** How each paper is set; nothing is worked for one that is not asked for. */
+const setters: Readonly<Record<Paper, (snapshot: Snapshot, logo: Buffer | null) => Promise<Buffer> | Buffer>> = {
+  'estimate.pdf': (snapshot, logo) => estimatePaper(snapshot, logo),
+  'estimate.xlsx': (snapshot) => estimateWorkbook(snapshot),
+  'leaf-order.pdf': (snapshot, logo) => leafOrderPaper(snapshot, { lines: orderLines(snapshot), logo }),
+  'leaf-order.csv': (snapshot) => {
+    const { currency } = snapshot.workshop;
+    const words = paperWords(snapshot.workshop);
+    return leafOrderList(orderLines(snapshot), { words, currency, digits: currencyDigits(currency) });
+  },
+};
+
+function paperFile({ estimate, varies }: Snapshot, paper: Paper, bytes: Buffer): PaperFile {
   const [kind, ending] = paper.split('.');
-  const name = fileName([kind, estimate.number, estimate.letter], ending);
+  const name = fileName([varies && kind === 'estimate' ? 'variation' : kind, estimate.number, estimate.letter], ending);
   return { paper, name, media: media[paper], bytes };
 }
 
 /**
- * The papers of an issue, from nothing but the issue and the picture of the letterhead (PNG or JPEG): no clock, no chance, equal bytes for
+ * One paper of an issue, from nothing but the issue and the picture of the letterhead (PNG or JPEG): no clock, no chance, equal bytes for
  * equal content. The workbook and the leaf order show what things cost, and are not for clients.
  */
-export async function issuePapers(snapshot: Snapshot, logo: Buffer | null): Promise<PaperFile[]> {
-  const bytes = await bytesOf(snapshot, logo);
-  return (Object.keys(media) as Paper[]).map((paper) => paperFile(snapshot, paper, bytes[paper]));
-}
+export const issuePaper = async (snapshot: Snapshot, logo: Buffer | null, paper: Paper): Promise<PaperFile> =>
+  paperFile(snapshot, paper, await setters[paper](snapshot, logo));
 
-/** The paper of the client alone, as the issue's own would be: byte for byte, where nothing else is chosen. */
-export const clientPaper = async (snapshot: Snapshot, logo: Buffer | null): Promise<PaperFile> =>
-  paperFile(snapshot, 'estimate.pdf', await estimatePaper(snapshot, logo));
+/** All papers of an issue. */
+export async function issuePapers(snapshot: Snapshot, logo: Buffer | null): Promise<PaperFile[]> {
+  const papers: PaperFile[] = [];
+  for (const paper of Object.keys(media) as Paper[]) papers.push(await issuePaper(snapshot, logo, paper));
+  return papers;
+}

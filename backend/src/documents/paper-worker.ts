@@ -1,12 +1,12 @@
 import { parentPort } from 'node:worker_threads';
 import { benchSheet } from './bench-sheet/bench-sheet';
-import { clientPaper, issuePapers } from './issue-papers';
+import { issuePaper, issuePapers } from './issue-papers';
 import type { PaperQuestion } from './paper-making';
 
 async function made(question: PaperQuestion) {
   if (question.kind === 'bench-sheet') return benchSheet(question.request);
   const logo = question.logo && Buffer.from(question.logo);
-  if (question.kind === 'estimate') return clientPaper(question.snapshot, logo);
+  if (question.kind === 'paper') return issuePaper(question.snapshot, logo, question.paper);
   return issuePapers(question.snapshot, logo);
 }
 

@@ -1,3 +1,4 @@
+import { Op } from 'sequelize';
 import type { Database } from '../platform/database/database';
 import { WorkshopRows } from '../platform/database/workshop-rows';
 import { estimateTable, type EstimateRow } from './estimate-model';
@@ -10,5 +11,9 @@ export class EstimateRepository extends WorkshopRows<EstimateRow> {
 
   ofJob(workshopId: string, jobId: string): Promise<EstimateRow[]> {
     return this.list(workshopId, { where: { jobId } });
+  }
+
+  several(workshopId: string, ids: readonly string[]): Promise<EstimateRow[]> {
+    return this.list(workshopId, { where: { id: { [Op.in]: [...ids] } } });
   }
 }

@@ -1,5 +1,6 @@
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import type { Choice } from '#shared/estimates/draft';
+import type { Paper } from '#shared/estimates/issue-schema';
 import type { Snapshot } from '#shared/estimates/snapshot';
 import { Rejection } from '#shared/problems/rejection';
 import type { WorkshopService } from '../accounts';
@@ -56,6 +57,28 @@ export class FrozenIssueService {
     });
   }
 
+  /** Every accepted issue of a workshop by its id and gross amount. */
+  accepted(workshopId: string): Promise<Pick<IssueRow, 'id' | 'grossMinor'>[]> {
+    return this.parts.issues.accepted(workshopId);
+  }
+
+  /** Several with all they froze, asked for at once. */
+  async several(workshopId: string, issueIds: readonly string[]): Promise<FrozenIssue[]> {
+    if (issueIds.length === 0) return [];
+    const rows = await this.parts.issues.several(workshopId, issueIds);
+    const estimates = await this.parts.estimates.several(
+      workshopId,
+      rows.map(({ estimateId }) => estimateId),
+    );
+    const byId = new Map(estimates.map((estimate) => [estimate.id, estimate]));
+    return rows.flatMap((row) => {
+      const estimate = byId.get(row.estimateId);
+      if (!estimate) return [];
+      const snapshot = thawedSnapshot(row);
+      return [{ row, estimate, title: snapshot.draft.settings.title, snapshot }];
+    });
+  }
+
   async read(workshopId: string, issueId: string): Promise<FrozenIssue> {
     return this.whole(await this.parts.issues.get(workshopId, issueId));
   }
@@ -85,15 +108,16 @@ export class FrozenIssueService {
 
   /** The client's paper: of the base the very one that was issued, of a choice one set from it as chosen. Equal choice, equal bytes. */
   async paper({ workshopId, id }: IssueRow, chosen: Snapshot): Promise<IssuedPaper> {
-    if (chosen.choice.length > 0) return this.parts.papers.estimatePaper(chosen, await this.logo(workshopId));
+    if (chosen.choice.length > 0)
+      return this.parts.papers.issuePaper(chosen, await this.logo(workshopId), 'estimate.pdf');
     const fileId = await this.parts.issues.paperFile(workshopId, id, 'estimate.pdf');
     if (!fileId) throw new Rejection('not-found', 'problem-not-found');
     return this.parts.files.read(workshopId, fileId);
   }
 
-  /** All papers, set from an issue as chosen. */
-  async papers({ workshopId }: IssueRow, chosen: Snapshot): Promise<readonly PaperFile[]> {
-    return this.parts.papers.issuePapers(chosen, await this.logo(workshopId));
+  /** One of its papers, set from an issue as chosen. */
+  async set({ workshopId }: IssueRow, chosen: Snapshot, paper: Paper): Promise<PaperFile> {
+    return this.parts.papers.issuePaper(chosen, await this.logo(workshopId), paper);
   }
 
   private async logo(workshopId: string): Promise<Buffer | null> {

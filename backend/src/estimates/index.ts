@@ -10,6 +10,7 @@ import { AgreedChoices } from './agreed-choices';
 import type { AgreedIssues } from './agreed-issue';
 import { cardEffects } from './card-effects';
 import { ChangeService } from './change-service';
+import type { ContractHolding } from './contract-holding';
 import { memberRepository, pieceRepository } from './content-repository';
 import { currencyChange } from './currency-change';
 import { EstimateRepository } from './estimate-repository';
@@ -57,6 +58,7 @@ export interface EstimatesNeeds {
   readonly papers: PaperMaker;
   readonly programme: FrozenProgramme;
   readonly agreed: AgreedIssues;
+  readonly mustHold: ContractHolding;
 }
 
 /** Estimates: drafts and their issues. */
@@ -79,7 +81,7 @@ export function openEstimates({ database, clock, files }: Platform, needs: Estim
   needs.accounts.workshops.followCurrency(currencyChange(kept));
   const choices = new AgreedChoices({ ...kept, agreed: needs.agreed });
   const frozen = new FrozenIssueService(kept);
-  const issues = new IssueService({ ...kept, choices, programme: needs.programme });
+  const issues = new IssueService({ ...kept, choices, programme: needs.programme, mustHold: needs.mustHold });
   const papers = new PaperService({ ...kept, choices, frozen });
   const presence = new PresenceService({ ...parts, presences });
   const effects = cardEffects({ drafts, jobs: needs.jobs, cards: needs.rateCards.service, risks: parts.risks });

@@ -19,6 +19,8 @@ export function mayBeIssued({ whole, figures, request, cardInForceId }: Issuing)
     throw new Rejection('conflict', 'issue-empty');
   if (whole.estimate.rateCardId !== cardInForceId && !request.acceptsOldCard)
     throw new Rejection('conflict', 'issue-card-old');
+  if (whole.estimate.kind === 'estimate' && figures.price.net_minor < 0)
+    throw new Rejection('conflict', 'issue-below-nothing');
   const all = [...figures.findings, ...figures.cost.findings];
   const stopping = all.filter(({ kind }) => kind === 'refuse' || kind === 'missing');
   if (stopping.length === 0) return;

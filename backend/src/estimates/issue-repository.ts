@@ -12,7 +12,7 @@ export class IssueRepository {
   private readonly issues: WorkshopRows<IssueRow>;
   private readonly papers: WorkshopRows<IssuePaperRow>;
 
-  constructor(database: Database) {
+  constructor(private readonly database: Database) {
     this.issues = new WorkshopRows(issueTable(database));
     this.papers = new WorkshopRows(issuePaperTable(database));
   }
@@ -62,6 +62,18 @@ export class IssueRepository {
   ofEstimates(workshopId: string, estimateIds: readonly string[]): Promise<IssueRow[]> {
     const where = { estimateId: { [Op.in]: [...estimateIds] } };
     return this.issues.list(workshopId, { where, order: [['id', 'DESC']] });
+  }
+
+  /** Every accepted issue of a workshop, without what it froze. */
+  accepted(workshopId: string): Promise<Pick<IssueRow, 'id' | 'grossMinor'>[]> {
+    return this.database.select(
+      `SELECT id, gross_minor AS grossMinor FROM issues WHERE workshop_id = :workshopId AND state = 'accepted'`,
+      { workshopId },
+    );
+  }
+
+  several(workshopId: string, ids: readonly string[]): Promise<IssueRow[]> {
+    return this.issues.list(workshopId, { where: { id: { [Op.in]: [...ids] } } });
   }
 
   async paperFile(workshopId: string, issueId: string, paper: Paper): Promise<string | undefined> {

@@ -10,20 +10,20 @@ import { lineDifferences, type LineDifference, type NamedLines } from '#shared/e
 import type { Snapshot, SnapshotProgramme } from '#shared/estimates/snapshot';
 import { Rejection } from '#shared/problems/rejection';
 import type { Doer } from '../audit';
-import { jobNumber, type NamedJobRow } from '../jobs';
 import type { FileStore } from '../platform/files/file-store';
 import { dayOfInstant } from '#shared/calendar/day-of-instant';
 import type { AgreedChoices } from './agreed-choices';
+import type { ContractHolding } from './contract-holding';
+import type { EstimateRow } from './estimate-model';
 import type { EstimateParts, EstimateService } from './estimate-service';
 import { presentEstimate } from './estimate-presenter';
 import { frozenSnapshot, thawedSnapshot, wholeOfSnapshot } from './frozen-snapshot';
+import { IssueFreezing } from './issue-freezing';
 import type { IssueRow } from './issue-model';
 import type { PaperMaker } from './paper-maker';
 import { mayBeIssued, mayBeMarked } from './issue-policy';
 import { presentFrozenDates } from './issue-presenter';
 import type { IssueRepository } from './issue-repository';
-import { snapshotOf } from './snapshot-of';
-import type { WholeEstimate } from './whole-estimate';
 
 /** The programme of an estimate as an issue freezes it; a later feature supplies it. Null where no plan holds. */
 export type FrozenProgramme = (workshopId: string, estimateId: string) => Promise<SnapshotProgramme | null>;
@@ -38,6 +38,7 @@ export interface IssueParts extends Pick<
   readonly papers: PaperMaker;
   readonly programme: FrozenProgramme;
   readonly choices: AgreedChoices;
+  readonly mustHold: ContractHolding;
 }
 
 export interface IssueRequest {
@@ -73,6 +74,10 @@ function markingDeed(issue: IssueRow, number: string, { state, choice = [] }: Is
   return { code: 'history-issue-accepted-with', values: { ...values, chosen: names.join(', ') } } as const;
 }
 
+/** An open issue of an earlier calculator is accepted as it stands: its alternatives are worked by none any more. */
+const mayChooseNoMore = ({ state }: IssueRow, { draft, calculatorVersion: worked }: Snapshot): boolean =>
+  (state === 'issued' || state === 'sent') && draft.settings.alternatives.length > 0 && worked !== calculatorVersion;
+
 /** Issues: freezing an estimate with its papers, reading them back, and marking where they stand with the client. */
 export class IssueService {
   constructor(private readonly parts: IssueParts) {}
@@ -90,8 +95,11 @@ export class IssueService {
     const figures = await this.parts.drafts.figures(whole);
     const inForce = await this.parts.cards.inForce(workshopId);
     mayBeIssued({ whole, figures, request, cardInForceId: inForce.id });
+    if (whole.estimate.kind === 'variation')
+      await this.parts.mustHold(workshopId, whole.estimate.jobId, figures.price.taxes);
     const before = await this.parts.issues.newest(workshopId, estimateId);
-    const snapshot = await this.freeze(
+    const freezing = new IssueFreezing(this.parts);
+    const snapshot = await freezing.freeze(
       actor,
       { whole, figures },
       { letter: issueLetter((before?.sequence ?? 0) + 1), note: request.note },
@@ -125,6 +133,7 @@ export class IssueService {
     });
     const estimate = await this.parts.estimates.get(workshopId, issue.estimateId);
     if (estimate.kind === 'estimate') await this.parts.jobs.markState(by, estimate.jobId, mark.state);
+    else if (mark.state === 'accepted') await this.holdTogether(estimate);
     const deed = markingDeed(issue, estimate.number, mark);
     await this.parts.audit.record(by, { subject: { kind: 'issue', id }, jobId: estimate.jobId, ...deed });
     return row;
@@ -140,7 +149,7 @@ export class IssueService {
     const [summary] = await this.parts.choices.shown(workshopId, [row]);
     const whole = wholeOfSnapshot(snapshot, { ...row, jobId, kind, rateCardId });
     return {
-      summary,
+      summary: { ...summary, choicesFixed: mayChooseNoMore(row, snapshot) },
       differences: before ? lineDifferences(namedLines(thawedSnapshot(before)), namedLines(snapshot)) : [],
       alternatives: [...snapshot.alternatives],
       dates: presentFrozenDates(snapshot),
@@ -162,39 +171,16 @@ export class IssueService {
     return { letter: newest.letter, lines: lineDifferences(namedLines(thawedSnapshot(newest)), after) };
   }
 
+  /** The job is held first: two variations that take the same away are looked at one after the other. */
+  private async holdTogether({ workshopId, jobId }: EstimateRow): Promise<void> {
+    await this.parts.jobs.touch(workshopId, jobId);
+    await this.parts.mustHold(workshopId, jobId);
+  }
+
   /** Of one estimate one issue is agreed on: what changes afterwards is a variation. */
   private async refuseSecond({ workshopId, estimateId }: IssueRow): Promise<void> {
     const others = await this.parts.issues.ofEstimate(workshopId, estimateId);
     if (others.some(({ state }) => state === 'accepted')) throw new Rejection('conflict', 'decision-another-accepted');
-  }
-
-  private async job(workshopId: string, jobId: string): Promise<NamedJobRow & { number: string }> {
-    const row = await this.parts.jobs.job(workshopId, jobId);
-    return { ...row, number: jobNumber(row) };
-  }
-
-  private async freeze(
-    actor: Actor,
-    worked: { whole: WholeEstimate; figures: Snapshot['figures'] },
-    paper: { letter: string; note: string },
-  ): Promise<Snapshot> {
-    const { workshopId } = actor;
-    const { estimate } = worked.whole;
-    const job = await this.job(workshopId, estimate.jobId);
-    const client = await this.parts.jobs.client(workshopId, job.clientId);
-    return snapshotOf({
-      ...worked,
-      ...paper,
-      alternatives: await this.parts.drafts.alternatives(worked.whole),
-      card: await this.parts.cards.get(workshopId, estimate.rateCardId),
-      workshop: await this.parts.workshops.get(workshopId),
-      client: { name: client.name, contact: client.contact, address: client.address },
-      job: { number: job.number, title: job.title, reference: job.reference, site: job.site },
-      now: this.parts.clock.now(),
-      today: await this.parts.cards.today(workshopId),
-      issuedBy: actor.name,
-      programme: await this.parts.programme(workshopId, estimate.id),
-    });
   }
 
   private async keep(actor: Actor, snapshot: Snapshot, sequence: number): Promise<IssueRow> {

@@ -26,7 +26,7 @@ export interface BenchSheetRequest {
 /** Who makes the papers: a later feature, supplied when the application is put together. */
 export interface PaperMaker {
   readonly issuePapers: (snapshot: Snapshot, logo: Buffer | null) => Promise<readonly PaperFile[]>;
-  /** The paper of the client alone. */
-  readonly estimatePaper: (snapshot: Snapshot, logo: Buffer | null) => Promise<PaperFile>;
+  /** One of them alone. */
+  readonly issuePaper: (snapshot: Snapshot, logo: Buffer | null, paper: Paper) => Promise<PaperFile>;
   readonly benchSheet: (request: BenchSheetRequest) => Promise<Buffer>;
 }

@@ -79,8 +79,7 @@ export class PaperService {
     const choice = await this.parts.choices.ofIssue(row);
     if (choice.length === 0) return undefined;
     const chosen = await this.parts.frozen.worked(thawedSnapshot(row), choice);
-    const made = await this.parts.frozen.papers(row, chosen);
-    const order = made.find((one) => one.paper === paper);
-    return order && new FileAnswer(order.bytes, { name: order.name, media: order.media });
+    const { bytes, name, media } = await this.parts.frozen.set(row, chosen, paper);
+    return new FileAnswer(bytes, { name, media });
   }
 }

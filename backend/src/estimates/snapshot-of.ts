@@ -8,6 +8,7 @@ import type {
   SnapshotClient,
   SnapshotJob,
   SnapshotProgramme,
+  SnapshotVaried,
   SnapshotWorkshop,
 } from '#shared/estimates/snapshot';
 import type { WorkshopSettingsRow } from '../accounts';
@@ -30,6 +31,8 @@ export interface Freezing {
   readonly note: string;
   /** Null where no plan holds. */
   readonly programme: SnapshotProgramme | null;
+  /** What a variation changes; null for an estimate. */
+  readonly varies: readonly SnapshotVaried[] | null;
 }
 
 export const snapshotWorkshop = (workshop: WorkshopSettingsRow): SnapshotWorkshop => {
@@ -74,5 +77,6 @@ export function snapshotOf(freezing: Freezing): Snapshot {
     figures,
     alternatives,
     ...(freezing.programme ? { programme: freezing.programme } : {}),
+    ...(freezing.varies ? { varies: freezing.varies } : {}),
   };
 }

@@ -10,6 +10,7 @@ import { CheckoutRepository } from './checkout-repository';
 import { CheckoutService } from './checkout-service';
 import { currencyMayChange } from './currency-policy';
 import { DraftService } from './draft-service';
+import { DueStagesService, type OpenContracts } from './due-stages-service';
 import { InvoiceLetters } from './invoice-letters';
 import { InvoiceNumbers } from './invoice-numbers';
 import { InvoicePaperMaking } from './invoice-paper-making';
@@ -57,6 +58,7 @@ export interface InvoicesNeeds {
   readonly jobs: Jobs;
   readonly letters: Agreements['letters'];
   readonly contract: ContractOf;
+  readonly openContracts: OpenContracts;
 }
 
 function partsOf({ config, database, clock, files }: Platform, needs: InvoicesNeeds): InvoiceParts {
@@ -79,7 +81,9 @@ export function openInvoices(platform: Platform, needs: InvoicesNeeds): Invoices
   parts.workshops.followCurrency(currencyMayChange(parts));
   const drafts = new DraftService(parts);
   const settling = new SettlingService(parts);
-  const stages = new StageService({ ...parts, drafts, days: new StageDayRepository(database) });
+  const days = new StageDayRepository(database);
+  const stages = new StageService({ ...parts, drafts, days });
+  const due = new DueStagesService({ ...parts, days, contracts: needs.openContracts });
   const issuing = new IssuingService({ ...parts, stages, settling, numbers: new InvoiceNumbers(database) });
   const ledger = new LedgerService(parts);
   const reading = new InvoiceReading({ ...parts, issuing, ledger });
@@ -92,7 +96,7 @@ export function openInvoices(platform: Platform, needs: InvoicesNeeds): Invoices
   const checkouts = new CheckoutService({ ...parts, database, checkouts: rows, cards, entering });
   const statements = new LedgerPapers(parts, ledger);
   const routes = [
-    ...invoiceRoutes({ drafts, stages, issuing, reading, settings: parts.settings, letters }),
+    ...invoiceRoutes({ drafts, stages, due, issuing, reading, settings: parts.settings, letters }),
     ...paymentRoutes({
       recording,
       refunds,

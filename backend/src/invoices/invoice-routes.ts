@@ -1,4 +1,5 @@
 import { beginStageInvoice, planStage, readContractAccount } from '#shared/invoices/contract-account-endpoints';
+import { listDueStages } from '#shared/invoices/due-stages-endpoints';
 import {
   beginCreditNote,
   issueInvoice,
@@ -13,6 +14,7 @@ import {
 } from '#shared/invoices/invoices-endpoints';
 import { mount, type Route } from '../platform/http/mount';
 import type { DraftService } from './draft-service';
+import type { DueStagesService } from './due-stages-service';
 import type { InvoiceLetters } from './invoice-letters';
 import { presentCurrent } from './invoice-presenter';
 import type { InvoiceReading } from './invoice-reading';
@@ -23,13 +25,14 @@ import type { StageService } from './stage-service';
 interface Parts {
   readonly drafts: DraftService;
   readonly stages: StageService;
+  readonly due: DueStagesService;
   readonly issuing: IssuingService;
   readonly reading: InvoiceReading;
   readonly settings: InvoiceSettingsService;
   readonly letters: InvoiceLetters;
 }
 
-export const invoiceRoutes = ({ drafts, stages, issuing, reading, settings, letters }: Parts): Route[] => [
+export const invoiceRoutes = ({ drafts, stages, due, issuing, reading, settings, letters }: Parts): Route[] => [
   mount(readInvoiceSettings, ({ actor }) => settings.read(actor.workshopId)),
   mount(keepInvoiceSettings, ({ actor, version, body }) => settings.keep(actor, version, body)),
   mount(listInvoices, ({ actor, query }) => reading.page(actor.workshopId, query)),
@@ -56,6 +59,7 @@ export const invoiceRoutes = ({ drafts, stages, issuing, reading, settings, lett
   mount(readContractAccount, async ({ actor, params }) => ({
     contract: await stages.account(actor.workshopId, params.jobId),
   })),
+  mount(listDueStages, ({ actor, query }) => due.page(actor.workshopId, query)),
   mount(beginStageInvoice, async ({ actor, params, body }) =>
     reading.read(await stages.begin(actor, params.jobId, body)),
   ),

@@ -1,21 +1,22 @@
 import { v7 as newId } from 'uuid';
 import type { Actor } from '#shared/actor/actor';
-import type { Contract, ContractPart } from '#shared/agreements/contract';
-import { claimRounding, contractAccount, isClaiming, type ClaimingInvoice } from '#shared/invoices/contract-account';
+import type { ContractPart } from '#shared/agreements/contract';
+import { creditedRest } from '#shared/invoices/claimed-again';
+import { takenClaims, type ClaimingInvoice } from '#shared/invoices/claiming-invoice';
+import { claimRounding, contractAccount, partAccount } from '#shared/invoices/contract-account';
 import type { ContractAccountAnswer } from '#shared/invoices/contract-account-endpoints';
-import { buyerOf } from '#shared/invoices/buyer-of';
-import type { InvoiceContent } from '#shared/invoices/invoice';
-import { claimedAmounts, type StageClaim } from '#shared/invoices/stage-claim';
-import { stageLines } from '#shared/invoices/stage-lines';
+import { fittingClaim } from '#shared/invoices/fitting-claim';
+import { claimedAmounts, claimedDue, type PlannedClaim, type StageClaim } from '#shared/invoices/stage-claim';
 import { isUncovered, type WorkSpan } from '#shared/invoices/uncovered-work';
-import { currencyDigits } from '#shared/money/currency-digits';
 import { D, type MinorUnits } from '#shared/money/decimal';
 import { Rejection } from '#shared/problems/rejection';
+import { ClaimReading } from './claim-reading';
 import type { DraftService } from './draft-service';
 import type { InvoiceRow } from './invoice-model';
-import { wordsOf, type InvoiceParts } from './invoice-parts';
+import type { InvoiceParts } from './invoice-parts';
+import { writtenOffOf } from './settling-service';
 import type { StageDayRepository } from './stage-day-repository';
-import { shortened, stageNames } from './stage-names';
+import { StageDrafts, type Claimed } from './stage-drafts';
 
 interface Parts extends InvoiceParts {
   readonly drafts: DraftService;
@@ -29,22 +30,15 @@ export interface StageAsked {
   readonly claim: StageClaim;
 }
 
-const claiming = (row: InvoiceRow): ClaimingInvoice[] =>
-  row.claim && row.claimIssueId
-    ? [
-        {
-          ...{ invoiceId: row.id, issueId: row.claimIssueId, claim: row.claim, isIssued: row.state === 'issued' },
-          ...{ due_minor: row.dueMinor, credited_minor: row.creditedMinor },
-        },
-      ]
-    : [];
-
 const spanOf = (claim: StageClaim): WorkSpan[] =>
   claim.of === 'work' ? [{ from: new D(claim.from_percent), to: new D(claim.to_percent) }] : [];
 
 /** The same claim is the same text, however its percentages were written. */
-export const claimKey = (claim: StageClaim): string =>
-  claim.of === 'work' ? `work ${new D(claim.from_percent).toString()} ${new D(claim.to_percent).toString()}` : claim.of;
+export const claimKey = (claim: StageClaim): string => {
+  if (claim.of === 'again') return `again ${claim.invoiceId}`;
+  if (claim.of !== 'work') return claim.of;
+  return `work ${new D(claim.from_percent).toString()} ${new D(claim.to_percent).toString()}`;
+};
 
 /** Invoices out of a contract: what may be invoiced next, and the drafts of deposits, stages, valuations and releases. */
 export class StageService {
@@ -76,27 +70,27 @@ export class StageService {
     return { ...account, currency: contract.currency, parts };
   }
 
-  /** Drafts the invoice of a claim that nothing claims yet; two who do so at once are let through one by one. */
+  /** Drafts the invoice or credit note of a claim that nothing claims yet; two who do so at once are let through one by one. */
   async begin(actor: Actor, jobId: string, asked: StageAsked): Promise<InvoiceRow> {
     const { workshopId } = actor;
     await this.parts.jobs.job(workshopId, jobId);
     await this.parts.settings.hold(workshopId);
-    const { contract, part } = await this.partOf(workshopId, jobId, asked.issueId);
-    const claims = await this.claims(workshopId, jobId);
-    this.mustBeFree(part, asked.claim, claims);
-    const content = await this.contentOf(workshopId, { contract, part, claim: asked.claim });
-    return this.parts.drafts.add(actor, content, {
-      ...{ id: asked.invoiceId, kind: 'invoice', currency: contract.currency },
-      ...{ claimIssueId: part.issueId, claim: asked.claim },
-      known_minor: claimRounding(part, asked.claim),
+    const claimed = await this.partOf(workshopId, jobId, asked.issueId);
+    const first = await this.firstDraft(claimed, asked.claim);
+    const { currency } = claimed.contract;
+    return this.parts.drafts.add(actor, first.content, {
+      ...{ id: asked.invoiceId, kind: 'invoice', currency, claimIssueId: asked.issueId, claim: asked.claim },
+      ...first.given,
+      known_minor: first.known_minor,
     });
   }
 
-  /** What the invoice of a claim is rounded by, at the moment it is issued. */
-  async roundingOf(row: InvoiceRow): Promise<MinorUnits> {
-    if (!row.claim || !row.claimIssueId || row.jobId === null) return 0;
-    const { part } = await this.partOf(row.workshopId, row.jobId, row.claimIssueId);
-    return claimRounding(part, row.claim);
+  /** What the paper of a claim is rounded by, at the moment it is issued. */
+  async roundingOf({ workshopId, jobId, claim, claimIssueId, kind, roundingMinor }: InvoiceRow): Promise<MinorUnits> {
+    if (!claim || !claimIssueId || jobId === null) return 0;
+    if (claim.of === 'again' || kind === 'credit-note') return roundingMinor;
+    const { part } = await this.partOf(workshopId, jobId, claimIssueId);
+    return claimRounding(part, claim);
   }
 
   async plan(
@@ -112,47 +106,63 @@ export class StageService {
     await this.parts.audit.record(actor, { subject, jobId, code: 'history-stage-planned', after: asked });
   }
 
-  private async claims(workshopId: string, jobId: string): Promise<ClaimingInvoice[]> {
-    return (await this.parts.invoices.claiming(workshopId, jobId)).flatMap(claiming);
+  private claims(workshopId: string, jobId: string): Promise<ClaimingInvoice[]> {
+    return new ClaimReading(this.parts.invoices).ofJobs(workshopId, [jobId]);
   }
 
-  private async partOf(
-    workshopId: string,
-    jobId: string,
-    issueId: string,
-  ): Promise<{ contract: Contract; part: ContractPart }> {
+  private async partOf(workshopId: string, jobId: string, issueId: string): Promise<Claimed> {
     const contract = await this.parts.contract(workshopId, jobId);
     if (!contract) throw new Rejection('conflict', 'invoice-no-contract');
     const part = contract.parts.find((one) => one.issueId === issueId);
     if (!part) throw new Rejection('not-found', 'invoice-claim-unknown');
-    return { contract, part };
+    return { workshopId, contract, part };
   }
 
-  private mustBeFree(part: ContractPart, claim: StageClaim, claims: readonly ClaimingInvoice[]): void {
-    const own = claims.filter((one) => one.issueId === part.issueId && isClaiming(one));
-    const spans = own.flatMap((one) => spanOf(one.claim));
-    const [asked] = spanOf(claim);
-    const { next } = contractAccount({ parts: [part] } as unknown as Contract, own).parts[0];
-    const isFree = asked
-      ? asked.to.greaterThan(asked.from) && isUncovered(asked, spans) && claimedAmounts(part, claim).length > 0
-      : next.some((one) => one.claim.of === claim.of);
-    if (!isFree) throw new Rejection('conflict', 'invoice-claim-taken');
+  private async firstDraft(claimed: Claimed, claim: StageClaim) {
+    const { workshopId, contract, part } = claimed;
+    const own = (await this.claims(workshopId, contract.jobId)).filter(({ issueId }) => issueId === part.issueId);
+    const drafts = new StageDrafts(this.parts);
+    if (claim.of === 'again') {
+      const taken = takenClaims(own);
+      const invoice = taken.find(({ invoiceId }) => invoiceId === claim.invoiceId);
+      const rest = invoice && creditedRest(invoice, taken);
+      if (!invoice || !rest || rest.due_minor <= 0) throw new Rejection('conflict', 'invoice-claim-taken');
+      return { ...(await drafts.again(claimed, rest, invoice.number)), given: {} };
+    }
+    mustBeFree(part, claim, own);
+    if (part.gross_minor >= 0) return { ...(await drafts.planned(claimed, claim)), given: {} };
+    const { credits, fitting } = await this.credited(claimed, claim);
+    const given = { kind: 'credit-note', creditedInvoiceId: credits.id, claim: fitting } as const;
+    return { ...(await drafts.takenAway(claimed, fitting, credits)), given };
   }
 
-  private async contentOf(
-    workshopId: string,
-    { contract, part, claim }: { contract: Contract; part: ContractPart; claim: StageClaim },
-  ): Promise<InvoiceContent> {
-    const client = await this.parts.jobs.client(workshopId, contract.clientId);
-    const workshop = await this.parts.workshops.get(workshopId);
-    const names = stageNames(await wordsOf(this.parts, workshopId), part, claim);
-    const { terms } = await this.parts.settings.read(workshopId);
-    return {
-      ...{ clientId: contract.clientId, jobId: contract.jobId, buyer: buyerOf(client, workshop.country) },
-      ...{ pricesHold: 'net', allowancesCharges: [], roundsToCash: false, note: '' },
-      ...{ deliveredOn: null, period: null, dueOn: null, terms },
-      exemptions: part.exemptions.map(({ code, reason }) => ({ code, reasonCode: '', reason: shortened(reason, 300) })),
-      lines: stageLines(claimedAmounts(part, claim), names, currencyDigits(contract.currency)),
-    };
+  /** The newest invoice of the job that takes the whole of what is taken away, else the newest that takes some of it. */
+  private async credited({ workshopId, contract, part }: Claimed, claim: PlannedClaim) {
+    if (claim.of !== 'work') throw new Rejection('conflict', 'invoice-claim-taken');
+    const { jobId, clientId, currency } = contract;
+    const all = await this.parts.invoices.issuedOfJob(workshopId, jobId);
+    const rooms = [];
+    for (const credits of all.filter((row) => row.clientId === clientId && row.currency === currency)) {
+      const writtenOff_minor = await writtenOffOf(this.parts.payments, workshopId, credits.id);
+      rooms.push({ credits, room_minor: credits.dueMinor - credits.creditedMinor - writtenOff_minor });
+    }
+    const whole_minor = -claimedDue(part, claim);
+    const some = rooms.filter(({ room_minor }) => room_minor > 0);
+    for (const { credits, room_minor } of [...some.filter((one) => one.room_minor >= whole_minor), ...some]) {
+      const fitting = fittingClaim(part, claim, room_minor);
+      if (fitting) return { credits, fitting };
+    }
+    throw new Rejection('conflict', 'invoice-nothing-to-credit');
   }
+}
+
+/** Nothing is claimed twice, nor before it is due. */
+function mustBeFree(part: ContractPart, claim: PlannedClaim, own: readonly ClaimingInvoice[]): void {
+  const spans = takenClaims(own).flatMap((one) => spanOf(one.claim));
+  const [asked] = spanOf(claim);
+  const { next } = partAccount(part, own);
+  const isFree = asked
+    ? asked.to.greaterThan(asked.from) && isUncovered(asked, spans) && claimedAmounts(part, claim).length > 0
+    : next.some((one) => one.claim.of === claim.of);
+  if (!isFree) throw new Rejection('conflict', 'invoice-claim-taken');
 }

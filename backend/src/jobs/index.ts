@@ -28,6 +28,8 @@ export interface Jobs {
   readonly clients: ClientService;
   /** A job with its client's name, refused as not found in any other workshop. */
   readonly job: (workshopId: string, jobId: string) => Promise<NamedJobRow>;
+  /** Those of these jobs that are the workshop's, asked for all at once. */
+  readonly several: (workshopId: string, jobIds: readonly string[]) => Promise<NamedJobRow[]>;
   readonly client: (workshopId: string, clientId: string) => Promise<ClientRow>;
   /** Says where issues have brought a job; called in the transaction that brings it there. */
   readonly markState: (by: Doer, jobId: string, reached: ReachedState) => Promise<void>;
@@ -56,6 +58,7 @@ export function openJobs({ database, clock }: Platform, { audit, accounts, estim
     service,
     clients: clientService,
     job: (workshopId, jobId) => service.get(workshopId, jobId),
+    several: (workshopId, jobIds) => base.named.several(workshopId, jobIds),
     client: (workshopId, clientId) => clientService.get(workshopId, clientId),
     markState: (by, jobId, reached) => states.mark(by, jobId, reached),
     touch: (workshopId, jobId) => states.touch(workshopId, jobId),

@@ -1,3 +1,4 @@
+import { Op } from 'sequelize';
 import type { Page } from '../platform/database/workshop-rows';
 import { Rejection } from '#shared/problems/rejection';
 import type { ClientRepository } from './client-repository';
@@ -14,6 +15,11 @@ export class NamedJobs {
   async page(workshopId: string, asked: JobsAsked): Promise<Page<NamedJobRow>> {
     const page = await this.jobs.pageOf(workshopId, asked);
     return { ...page, items: await this.named(workshopId, page.items) };
+  }
+
+  async several(workshopId: string, jobIds: readonly string[]): Promise<NamedJobRow[]> {
+    const where = { id: { [Op.in]: [...jobIds] } };
+    return this.named(workshopId, jobIds.length === 0 ? [] : await this.jobs.list(workshopId, { where }));
   }
 
   async get(workshopId: string, jobId: string): Promise<NamedJobRow> {

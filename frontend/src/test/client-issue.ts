@@ -72,6 +72,7 @@ export const clientPrice = (gross_minor: number, given: Partial<ClientPrice> = {
       },
     ],
     weeks: 6,
+    care: ['care-handling'],
     ...given,
   };
 };
@@ -104,7 +105,7 @@ export function clientIssue(given: Partial<ClientIssue> = {}): ClientIssue {
       alternative({ id: offered.crate, name: 'A crate', group: '', difference_minor: 221_40 }),
       alternative({ id: offered.sample, name: 'A sample', group: '', difference_minor: 0, weeks: 7 }),
     ],
-    ...{ mayChoose: true, isDrying: true, programme: null, cautions: [], care: ['care-handling'], questions: [] },
+    ...{ mayChoose: true, isDrying: true, programme: null, cautions: [], varies: [], questions: [] },
     decision: null,
     ...given,
   };

@@ -27,11 +27,19 @@ function emptyExtras({ lines }: PriceLines, { extras }: PriceInput): Finding[] {
     .map(({ id, name }) => ({ kind: 'warn', code: 'price-line-nothing', values: { line: name ?? '' }, about: id }));
 }
 
-/** What is to be told about a price: rates that are not in the card, further lines at nothing, a discount that leaves nothing, work sold below its cost. */
+/**
+ * Lines below nothing take work away, which a variation may and is not sold below cost; a discount below nothing leaves nothing to agree on.
+ */
+function belowNothing({ subtotal_minor, net_minor }: PriceLines): Finding {
+  if (subtotal_minor < 0)
+    return { kind: 'note', code: 'price-takes-away', values: { taken_minor: Math.abs(net_minor) } };
+  return { kind: 'refuse', code: 'price-below-nothing', values: { net_minor } };
+}
+
+/** What is to be told about a price: rates that are not in the card, further lines at nothing, a price below nothing, work sold below its cost. */
 export function priceFindings(lines: PriceLines, profit_minor: number, input: PriceInput): Finding[] {
   const findings = [...missingGrades(input), ...missingTaxes(lines, input), ...emptyExtras(lines, input)];
-  if (lines.net_minor < 0)
-    findings.push({ kind: 'refuse', code: 'price-below-nothing', values: { net_minor: lines.net_minor } });
+  if (lines.net_minor < 0) findings.push(belowNothing(lines));
   else if (profit_minor < 0)
     findings.push({ kind: 'warn', code: 'price-below-cost', values: { loss_minor: -profit_minor } });
   return findings;

@@ -230,6 +230,22 @@ describe('discount, tax and lump sum', () => {
     expect(codes({ ...leg, labour: [], goods: [], lumpSum: '100' })).toEqual(['price-lump-sum-nowhere']);
   });
 
+  it('may come below nothing by what its lines take away, and says so as no fault', () => {
+    const plain = {
+      kind: 'price',
+      id: 'plain',
+      name: 'Frieze stays plain',
+      taxCategoryId: 'standard',
+      memberId: null,
+    } as const;
+    const extras = [{ ...plain, alternativeId: null, price: '-420.00' }];
+    const { client, findings } = priceOf({ ...leg, labour: [], goods: [], extras });
+    expect(client).toMatchObject({ subtotal_minor: -420_00, net_minor: -420_00 });
+    expect(findings.filter(({ code }) => code.startsWith('price-takes') || code.startsWith('price-below'))).toEqual([
+      { kind: 'note', code: 'price-takes-away', values: { taken_minor: 420_00 } },
+    ]);
+  });
+
   it('is nothing for nothing', () => {
     const price = priceOf({ ...leg, labour: [], goods: [], discount: { way: 'percent', amount: '5' } });
     expect(price.client).toMatchObject({ lines: [], net_minor: 0, taxes: [], gross_minor: 0 });

@@ -19,6 +19,8 @@ export const agreements = {
   'decision-another-accepted': 'Another issue of this estimate has been accepted already.',
   'decision-changed':
     'The price or the paper is not the one that was shown. Please look at it once more before accepting.',
+  'variation-takes-too-much':
+    'This takes away more than was agreed on the job, or under a tax nothing was agreed under. Take away no more than there is.',
   'variation-no-contract':
     'Nothing has been agreed on this job yet, so there is nothing to vary. Change the estimate instead.',
   'variation-other-currency': 'This job was agreed in {currency}, and the workshop works in another currency now.',

@@ -5,6 +5,12 @@ export const documents = {
   'paper-estimate-title': 'Estimate {number}, issue {letter}',
   'paper-estimate-head': 'Estimate {number}, issue {letter}: {title}',
   'paper-estimate-subject': 'Estimate for {client}',
+  'paper-variation': 'Variation',
+  'paper-variation-title': 'Variation {number}, issue {letter}',
+  'paper-variation-head': 'Variation {number}, issue {letter}: {title}',
+  'paper-variation-subject': 'Variation for {client}',
+  'paper-varies': 'Changes',
+  'paper-varies-one': '{number}, issue {letter}: {title}',
   'paper-page-of': 'Page {page} of {pages}',
   'paper-date': 'Date',
   'paper-holds-until': 'Holds until',
@@ -59,6 +65,9 @@ export const documents = {
   'paper-payment-note':
     'Tax is included. The deposit is recovered from each stage in proportion to the work it pays for.',
 
+  'paper-takes-away':
+    '{amount} is taken off what was agreed, tax included. A credit note gives it back: off what is still open of the invoices, else as a credit or a repayment, whichever you like.',
+
   'paper-time': 'Time',
   'paper-time-weeks':
     'About {weeks, plural, one {one week} other {# weeks}} from the start of work until it is ready, drying and approvals included.',
@@ -67,6 +76,7 @@ export const documents = {
     'Size, gesso, bole, leaf and finishes dry at their own pace; the time is counted for workshop air of {temperature_celsius} and {humidity_percent} relative humidity.',
   'paper-holding': 'How long this holds',
   'paper-holds': 'This estimate holds until {day}.',
+  'paper-variation-holds': 'This variation holds until {day}.',
   'paper-leaf-holds':
     'Prices of leaf hold until {day}. Leaf ordered later is charged at the price of its day; nothing else changes.',
   'paper-included': 'Included',
@@ -107,6 +117,9 @@ export const documents = {
   'paper-terms': 'Terms',
   'paper-acceptance': 'Acceptance',
   'paper-acceptance-text': 'We accept estimate {number}, issue {letter}, at a total of {total}.',
+  'paper-acceptance-variation': 'We accept variation {number}, issue {letter}, which adds {total} to what was agreed.',
+  'paper-acceptance-taken-away':
+    'We accept variation {number}, issue {letter}, which takes {total} off what was agreed.',
   'paper-acceptance-place': 'Place and date',
   'paper-acceptance-name': 'Name and signature',
 

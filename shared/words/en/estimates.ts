@@ -10,6 +10,7 @@ export const estimates = {
     'This estimate is worked on a rate card that is no longer in force. Take the new card, or say that the old one is meant.',
   'issue-refused': 'The estimate cannot be issued as it stands. What stops it is listed with it.',
   'issue-empty': 'There is nothing in this estimate yet.',
+  'issue-below-nothing': 'An estimate cannot take more away than it offers. Only a variation of what was agreed may.',
   'issue-replaced': 'Issue {letter} was replaced by a later one.',
   'issue-decided': 'Issue {letter} was {state} already.',
   'issue-day-early': 'The day lies before the day of issue.',

@@ -53,6 +53,8 @@ export const money = {
   'price-insurance-over': 'Insurance at this rate would cost more than the price it insures. Please look at the rate.',
   'price-lump-sum-nowhere': 'There is no priced line to spread the lump sum over.',
   'price-below-nothing': 'The discount takes the price below nothing: {net_minor} would be left.',
+  'price-takes-away':
+    'This takes away {taken_minor} without tax. Only a variation of what was agreed may; what it takes away is credited to the client.',
   'price-line-nothing': '“{line}” comes to nothing: its figures are still empty.',
   'price-below-cost': 'This price is {loss_minor} below cost.',
   'risk-trials': '{trials} trials, generator {generator}, seed {seed}',

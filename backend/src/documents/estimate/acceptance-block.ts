@@ -5,6 +5,7 @@ import { sectionBlocks } from '../paper/section-blocks';
 import { textBlock, widthOf } from '../paper/text-block';
 import { writeLine } from '../paper/text-lines';
 import type { IssueContent } from './issue-content';
+import { paperNames } from './paper-names';
 
 const gap_pt = 30;
 const signing_pt = 46;
@@ -29,9 +30,7 @@ function drawSigning(flow: Flow, labels: readonly string[]): void {
 
 /** Where a client signs, all on one page. */
 export function acceptanceBlocks(pdf: Pdf, { snapshot, words }: IssueContent): Block[] {
-  const { number, letter } = snapshot.estimate;
-  const total = words.money(snapshot.figures.price.gross_minor);
-  const text = textBlock(pdf, words.say('paper-acceptance-text', { number, letter, total }));
+  const text = textBlock(pdf, paperNames(snapshot, words).acceptance);
   const labels = [words.say('paper-acceptance-place'), words.say('paper-acceptance-name')];
   const whole: Block = {
     lead_pt: text.lead_pt + signing_pt,

@@ -14,20 +14,20 @@ import { alternativesBlocks } from './alternatives-blocks';
 import { buildUpBlocks, memberDrawingBlocks } from './drawing-blocks';
 import { holdingBlocks } from './holding-blocks';
 import { issueContent, type IssueContent } from './issue-content';
+import { paperNames, titleOf } from './paper-names';
 import { paymentBlocks } from './payment-blocks';
 import { priceTable } from './price-table';
 import { programmeBlocks } from './programme-blocks';
 import { timeBlocks } from './time-blocks';
 
-const titleOf = ({ snapshot }: IssueContent): string =>
-  snapshot.draft.settings.title.trim() === '' ? snapshot.job.title : snapshot.draft.settings.title;
-
 function addressOf(pdf: Pdf, { snapshot, words }: IssueContent): Block {
   const { client, job, issuedOn, validUntil, issuedBy, estimate, figures } = snapshot;
+  const { kind, varies } = paperNames(snapshot, words);
   return addressBlock(pdf, {
     address: [client.name, client.contact, client.address],
     particulars: [
-      [words.say('paper-estimate'), words.say('paper-number-letter', { ...estimate })],
+      [kind, words.say('paper-number-letter', { ...estimate })],
+      [words.say('paper-varies'), varies],
       [words.say('paper-date'), words.day(issuedOn)],
       [words.say('paper-holds-until'), words.day(validUntil)],
       [words.say('paper-job'), [job.number, job.title].filter(Boolean).join(', ')],
@@ -54,7 +54,7 @@ function estimateBlocks(pdf: Pdf, content: IssueContent, logo: Buffer | null): B
   return [
     letterheadBlock({ workshop: snapshot.workshop, logo: printableLogo(pdf, logo), words }),
     addressOf(pdf, content),
-    textBlock(pdf, titleOf(content), { style: textStyles.title, tag: 'H1' }),
+    textBlock(pdf, titleOf(snapshot), { style: textStyles.title, tag: 'H1' }),
     ...introduction(pdf, content),
     ...sectionBlocks(pdf, words.say('paper-lines'), [priceTable(pdf, content)]),
     ...alternativesBlocks(pdf, content),
@@ -77,19 +77,18 @@ function estimateBlocks(pdf: Pdf, content: IssueContent, logo: Buffer | null): B
 export function estimatePaper(snapshot: Snapshot, logo: Buffer | null): Promise<Buffer> {
   const content = issueContent(snapshot);
   const { words } = content;
-  const { number, letter } = snapshot.estimate;
-  const title = words.say('paper-estimate-title', { number, letter });
+  const { title, head, subject } = paperNames(snapshot, words);
   return finishedPaper({
     facts: {
-      title: words.say('paper-estimate-head', { number, letter, title: titleOf(content) }),
+      title: head,
       author: snapshot.workshop.name,
-      subject: words.say('paper-estimate-subject', { client: snapshot.client.name }),
+      subject,
       language: words.language,
       size: snapshot.workshop.paperSize === 'Letter' ? 'Letter' : 'A4',
       madeAt: snapshot.issuedAt,
     },
     feet: {
-      head: words.say('paper-estimate-head', { number, letter, title: titleOf(content) }),
+      head,
       foot: `${snapshot.workshop.name} · ${title}`,
       pageOf: (page, pages) => words.say('paper-page-of', { page, pages }),
     },

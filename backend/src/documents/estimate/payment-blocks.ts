@@ -54,9 +54,16 @@ function planRow(columns: readonly PlanColumn[], row: PaymentRow): TableRow {
   return { cells: columns.map((column, place) => ({ text: column.text(row), isRowHead: place === 0 })), above: 'hair' };
 }
 
+/** What is taken away has no plan: it is given back. */
+function takenAwayBlocks(pdf: Pdf, { words, snapshot }: IssueContent): Block[] {
+  const amount = words.money(Math.abs(snapshot.figures.price.gross_minor));
+  return sectionBlocks(pdf, words.say('paper-payment'), [textBlock(pdf, words.say('paper-takes-away', { amount }))]);
+}
+
 /** The plan of payment: deposit, stages, releases, and the total they come to. */
 export function paymentBlocks(pdf: Pdf, content: IssueContent): Block[] {
   const { words, draft, snapshot } = content;
+  if (snapshot.figures.price.gross_minor < 0) return takenAwayBlocks(pdf, content);
   const { rows, sum_minor } = paymentRows(draft.settings.stages, snapshot.figures.stages);
   const columns = planColumns(words, rows);
   const total: TableRow = {

@@ -4,6 +4,7 @@ import { currencyDigits } from '#shared/money/currency-digits';
 import { minorOf } from '#shared/money/minor-of';
 import { sumMinor } from '#shared/money/sum-minor';
 import { addressBlock } from '../address-block';
+import { paperNames } from '../estimate/paper-names';
 import { letterheadBlock, printableLogo } from '../letterhead';
 import { finishedPaper } from '../paper/finished-paper';
 import type { Block } from '../paper/flow';
@@ -69,7 +70,7 @@ function orderBlocks(
       address: [],
       particulars: [
         [words.say('paper-job'), [job.number, job.title].filter(Boolean).join(', ')],
-        [words.say('paper-estimate'), words.say('paper-number-letter', { ...estimate })],
+        [paperNames(snapshot, words).kind, words.say('paper-number-letter', { ...estimate })],
         [words.say('paper-date'), words.day(issuedOn)],
       ],
     }),

@@ -1,3 +1,4 @@
+import { paperNames } from '../estimate/paper-names';
 import { Sheet } from './sheet';
 import type { WorkbookFacts } from './workbook-facts';
 
@@ -10,7 +11,9 @@ export function aboutSheet({ words, snapshot, settings }: WorkbookFacts, unit: s
     { width: 90, format: '' },
   ]);
   sheet.add([workshop.name], 'part');
-  sheet.add([say('paper-estimate'), say('paper-number-letter', { number: estimate.number, letter: estimate.letter })]);
+  const { kind, varies } = paperNames(snapshot, words);
+  sheet.add([kind, say('paper-number-letter', { number: estimate.number, letter: estimate.letter })]);
+  if (varies !== '') sheet.add([say('paper-varies'), varies]);
   sheet.add([say('paper-job'), [job.number, job.title].filter(Boolean).join(', ')]);
   sheet.add([say('sheet-title'), settings.title]);
   sheet.add([say('sheet-client'), client.name]);

@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, inject, output } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, output } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { declineIssue } from '#shared/client-page/client-issues-endpoints';
@@ -15,7 +15,11 @@ import { ClientIssueStore } from './client-issue-store';
   imports: [Entry, Field, FormComplaint, MatButton, ReactiveFormsModule],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <h1 tabindex="-1" i18n>Decline this estimate</h1>
+    @if (isVariation()) {
+      <h1 tabindex="-1" i18n>Decline this variation</h1>
+    } @else {
+      <h1 tabindex="-1" i18n>Decline this estimate</h1>
+    }
     <p i18n>
       The workshop is told, and this issue is closed. If something about it could be done otherwise, you might ask a
       question first.
@@ -34,7 +38,7 @@ import { ClientIssueStore } from './client-issue-store';
       <app-form-complaint [texts]="form.general()" />
       <div class="actions">
         <button matButton="outlined" type="submit" [disabled]="form.isSending()" i18n>Decline it</button>
-        <button matButton type="button" (click)="left.emit()" i18n>Back to the estimate</button>
+        <button matButton type="button" (click)="left.emit()" i18n>Back to reading it</button>
       </div>
     </form>
   `,
@@ -49,6 +53,8 @@ import { ClientIssueStore } from './client-issue-store';
 export class ClientDecline {
   private readonly api = inject(Api);
   private readonly store = inject(ClientIssueStore);
+
+  protected readonly isVariation = computed(() => this.store.issue()?.issue.kind === 'variation');
 
   readonly left = output();
   readonly declined = output();

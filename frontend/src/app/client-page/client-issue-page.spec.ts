@@ -108,7 +108,7 @@ describe('Declining', () => {
   it('can be left again', async () => {
     const visit = await ClientVisit.begin();
     await visit.press('Decline this estimate');
-    await visit.press('Back to the estimate');
+    await visit.press('Back to reading it');
     visit.http.expectNone((request) => request.url.endsWith('/refusal'));
     expect(visit.button('Review')).toBeDefined();
   });

@@ -83,8 +83,17 @@ export class ClientIssuePage {
     }),
   );
   protected readonly care = computed(() =>
-    (this.store.issue()?.care ?? []).map((code) => this.words.say(code as 'care-handling')),
+    (this.store.price()?.care ?? []).map((code) => this.words.say(code as 'care-handling')),
   );
+
+  /** What a variation changes, as the papers call it. */
+  protected readonly varies = computed(() =>
+    (this.store.issue()?.varies ?? []).map((one) => this.words.say('paper-varies-one', { ...one })).join('; '),
+  );
+  protected readonly takenAway = computed(() => {
+    const { gross_minor } = this.store.price() ?? { gross_minor: 0 };
+    return gross_minor < 0 ? this.words.say('paper-takes-away', { amount: this.formats.money(-gross_minor) }) : '';
+  });
 
   /** The dates of the programme, which was planned for the base alone. */
   protected readonly dates = computed(() => {

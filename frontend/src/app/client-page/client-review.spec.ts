@@ -85,7 +85,7 @@ describe('The last look before accepting', () => {
     visit.asked('acceptance').flush(refused(409, title), { status: 409, statusText: 'Conflict' });
     await visit.settle();
     expect(visit.text).toContain(title);
-    await visit.press('Back to the estimate');
+    await visit.press('Back to reading it');
     visit.http.expectOne((request) => request.method === 'GET');
     expect(visit.choice('Oil gilding').checked).toBe(true);
   });
@@ -96,7 +96,7 @@ describe('The last look before accepting', () => {
     visit.asked('review').flush(refused(503, 'Too much at once.'), { status: 503, statusText: 'Unavailable' });
     await visit.settle();
     expect(visit.element.querySelector('[role=alert]')?.textContent).toBe('Too much at once.');
-    await visit.press('Back to the estimate');
+    await visit.press('Back to reading it');
     expect(visit.element.querySelector('h1')?.textContent).toBe('Pier table');
   });
 });

@@ -7,6 +7,7 @@ import { Api } from '../core/api/api';
 import { addressOf } from '../core/api/address-of';
 import { schemaForm } from '../core/forms/schema-form';
 import { Formats } from '../core/formats/formats';
+import { Words } from '../core/formats/words';
 import { newId } from '../core/new-id';
 import { Entry } from '../ui/field/entry';
 import { Field } from '../ui/field/field';
@@ -27,6 +28,7 @@ export class ClientReview {
   private readonly api = inject(Api);
   protected readonly store = inject(ClientIssueStore);
   protected readonly formats = inject(Formats);
+  private readonly words = inject(Words);
 
   protected readonly besides = $localize`Besides`;
 
@@ -47,6 +49,11 @@ export class ClientReview {
   protected readonly chosen = computed(() => {
     const offered: ClientIssue['alternatives'] = this.store.issue()?.alternatives ?? [];
     return offered.filter(({ id }) => this.store.choice().includes(id));
+  });
+  protected readonly isVariation = computed(() => this.store.issue()?.issue.kind === 'variation');
+  protected readonly takenAway = computed(() => {
+    const gross_minor = this.review()?.price.gross_minor ?? 0;
+    return gross_minor < 0 ? this.words.say('paper-takes-away', { amount: this.formats.money(-gross_minor) }) : '';
   });
   protected readonly firstPayment = computed(() => this.review()?.price.payments[0]?.paid_minor);
   protected readonly paper = computed(() => {

@@ -38,6 +38,7 @@ export class AccountsPage {
   } as const;
   protected readonly parts = [
     { path: '/accounts', name: $localize`Owed` },
+    { path: '/accounts/due', name: $localize`To invoice` },
     { path: '/accounts/invoices', name: $localize`Invoices` },
     { path: '/accounts/payments', name: $localize`Payments` },
     { path: '/accounts/journal', name: $localize`Journal` },

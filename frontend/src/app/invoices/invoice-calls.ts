@@ -1,5 +1,6 @@
 import { Injectable, inject } from '@angular/core';
 import { beginStageInvoice, planStage, readContractAccount } from '#shared/invoices/contract-account-endpoints';
+import { listDueStages } from '#shared/invoices/due-stages-endpoints';
 import type { InvoiceContent, InvoiceKind } from '#shared/invoices/invoice';
 import type { InvoiceState } from '#shared/invoices/invoice-schema';
 import type { InvoiceSettings } from '#shared/invoices/invoice-settings';
@@ -132,6 +133,10 @@ export class InvoiceCalls {
 
   keepSettings(version: number, body: InvoiceSettings) {
     return this.api.call(keepInvoiceSettings, { version, body: body });
+  }
+
+  dueStages(cursor: string | undefined, signal: AbortSignal) {
+    return this.api.call(listDueStages, { query: { cursor }, signal });
   }
 
   async contract(jobId: string, signal: AbortSignal) {

@@ -43,6 +43,11 @@ export const invoicesRoutes: Routes = [
         loadComponent: () => import('./owed-page').then(({ OwedPage }) => OwedPage),
       },
       {
+        path: 'due',
+        title: $localize`To invoice`,
+        loadComponent: () => import('./due-stages-page').then(({ DueStagesPage }) => DueStagesPage),
+      },
+      {
         path: 'invoices',
         title: $localize`Invoices`,
         loadComponent: () => import('./invoices-page').then(({ InvoicesPage }) => InvoicesPage),

@@ -19,7 +19,7 @@ const contract: ContractAccountAnswer = {
     {
       ...{ issueId, kind: 'estimate', number: '2026-011-1', title: 'Pier table', acceptedOn: '2026-05-04' },
       ...{ net_minor: 1_000_00, gross_minor: 1_230_00, invoiced_minor: 400_00, credited_minor: 50_00 },
-      ...{ left_minor: 880_00, creditedInPart_minor: 0, isComplete: false },
+      ...{ left_minor: 880_00, isComplete: false },
       next: [
         { claim: { of: 'deposit' }, name: '', plannedOn: null, net_minor: 300_00, gross_minor: 369_00 },
         { claim: work, name: 'Delivered', plannedOn: '2026-07-01', net_minor: 415_45, gross_minor: 511_00 },
@@ -87,16 +87,37 @@ describe('JobInvoices', () => {
     expect(claim).toEqual({ of: 'work', from_percent: '40', to_percent: '62.5' });
   });
 
-  it('says what of a contract was credited in part, and how it may be invoiced again', async () => {
+  const shown = async (part: Partial<ContractAccountAnswer['parts'][number]>) => {
     const visit = await BooksVisit.begin(TestJob, { path: 'job', address: '/job', roles: ['office'] });
-    const [part] = contract.parts;
     const sums = { invoiced_minor: 1_230_00, credited_minor: 50_00, left_minor: 50_00 };
-    const parts = [{ ...part, ...sums, creditedInPart_minor: 50_00, next: [] }];
+    const parts = [{ ...contract.parts[0], ...sums, next: [], ...part }];
     await visit.answer('GET', account, { contract: { ...contract, ...sums, parts } });
     await visit.answer('GET', '/api/invoices', pageOf([]));
-    expect(visit.text).toContain('€50.00 of that credited since');
-    expect(visit.text).toContain('credit the rest of the same invoice');
+    return visit;
+  };
+
+  it('offers again what was credited of an invoice that stands', async () => {
+    const claim = { of: 'again', invoiceId: issueId } as const;
+    const next = { claim, name: '2026-0007', plannedOn: null, net_minor: 40_65, gross_minor: 50_00 };
+    const visit = await shown({ next: [next] });
     expect(visit.text).not.toContain('All of it is invoiced.');
+    await visit.press('Draft the invoice, Again, what was credited of 2026-0007');
+    expect(visit.request('POST', stage).request.body).toMatchObject({ issueId, claim });
+  });
+
+  it('offers what a variation takes away as a credit note, and no share of it', async () => {
+    const claim = { of: 'work', from_percent: '0', to_percent: '100' } as const;
+    const next = { claim, name: '', plannedOn: null, net_minor: -350_00, gross_minor: -420_00 };
+    const visit = await shown({ kind: 'variation', gross_minor: -420_00, next: [next] });
+    expect(visit.text).toContain('-€420.00');
+    expect(visit.button('Invoice by the share that is done')).toBeUndefined();
+    await visit.press('Draft the credit note, Taken away, to be credited');
+    expect(visit.request('POST', stage).request.body).toMatchObject({ issueId, claim });
+  });
+
+  it('says of what was taken away that it is credited, not invoiced', async () => {
+    const visit = await shown({ kind: 'variation', gross_minor: -420_00, isComplete: true });
+    expect(visit.text).toContain('All of it is credited.');
   });
 
   it('lets the estimator plan and draft nothing', async () => {

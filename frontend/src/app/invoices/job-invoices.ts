@@ -65,7 +65,8 @@ export class JobInvoices {
     (this.contract()?.parts ?? []).map((part) => ({
       ...part,
       next: part.next.map((next) => ({ ...next, title: claimName(next, this.formats) })),
-      firstWork: part.next.find(({ claim }) => claim.of === 'work')?.claim,
+      // What is taken away is credited as far as an invoice has room for it, whatever share of it that is.
+      firstWork: part.gross_minor < 0 ? undefined : part.next.find(({ claim }) => claim.of === 'work')?.claim,
     })),
   );
   /** The share of the contract that is invoiced, for the bar; figures stand beside it. */

@@ -112,7 +112,7 @@ export class IssueViewPage {
   }));
 
   protected take(summary: PricedIssueSummary): void {
-    this.read.update((issue) => issue && { ...issue, summary });
+    this.read.update((issue) => issue && { ...issue, summary: { ...issue.summary, ...summary } });
     this.store.reloadIssues();
   }
 }

@@ -78,7 +78,9 @@ export class ProfitForm {
   protected readonly cost = computed(() => this.store.costed()?.cost);
   protected readonly isAgreed = computed(() => this.store.settings()?.profit?.way === 'lump-sum');
   protected readonly belowCost = computed(() =>
-    (this.cost()?.findings ?? []).filter(({ code }) => code === 'price-below-cost' || code === 'price-below-nothing'),
+    (this.cost()?.findings ?? []).filter(({ code }) =>
+      ['price-below-cost', 'price-below-nothing', 'price-takes-away'].includes(code),
+    ),
   );
   protected readonly taxCategories = computed(() =>
     (this.money()?.taxCategories ?? []).map(({ id, name, percent }) => ({
