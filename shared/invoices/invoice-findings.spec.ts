@@ -114,6 +114,23 @@ it.each<[string, InvoiceInHand, string]>([
   ['BR-61: no account', hand({}, { account: null }), 'warn invoice-account-missing'],
   ['BR-DEC: three decimals', hand({}, { currency: 'KWD' }), 'note invoice-currency-no-data'],
   ['BR-CL-04: a currency that is gone', hand({}, { currency: 'BGN' }), 'note invoice-currency-no-data'],
+  ['BR-CL-04: a currency not listed yet', hand({}, { currency: 'MRU' }), 'note invoice-currency-no-data'],
+  [
+    'BR-CL-14: a buyer of no country',
+    hand({ buyer: { ...content({}).buyer, country: 'XX' } }),
+    'refuse invoice-country-unknown',
+  ],
+  ['BR-CL-14: a workshop of no country', hand({}, { country: 'ZZ' }), 'refuse invoice-country-unknown'],
+  [
+    'BR-CO-09: a buyer’s number of no country',
+    hand({ buyer: { ...content({}).buyer, vatId: 'AB51824753556' } }),
+    'refuse invoice-vat-form',
+  ],
+  [
+    'BR-CO-09: a seller’s number of no country',
+    hand({}, { seller: { vatId: 'ZZ123', taxNumber: '', companyNumber: '' } }),
+    'refuse invoice-vat-form',
+  ],
 ])('%s', (_what, of, expected) => {
   expect(codes(of)).toContain(expected);
 });

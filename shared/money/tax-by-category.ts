@@ -34,6 +34,9 @@ export interface TaxBreakdown {
 
 const untaxed: ReadonlySet<TaxCode> = new Set(['Z', 'E', 'AE', 'K', 'G', 'O']);
 
+/** The rate as it is written: nothing where the category charges no tax, whatever was entered (EN 16931, BR-AE-05 and its like). */
+export const ratePercent = (tax: TaxRate): DecimalText => (untaxed.has(tax.code) ? '0' : tax.percent);
+
 /** Two rates are one category when code and rate agree, however the rate is written (25, 25.0); null where a rate plays no part. */
 export const taxKey = (tax: TaxRate): string =>
   untaxed.has(tax.code) ? tax.code : `${tax.code} ${new D(tax.percent).toString()}`;

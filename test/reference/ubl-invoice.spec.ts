@@ -197,6 +197,61 @@ describe('the text', () => {
     expect(ublFaults(xml)).toEqual([]);
   });
 
+  it.each(['Z', 'E', 'AE', 'K', 'G'] as const)(
+    'charges nothing under %s, so the rate is 0 whatever was entered, in line, allowance and breakdown',
+    (code) => {
+      const tax = { code, percent: '20' };
+      const off = { charge: false, reason: 'Discount', reasonCode: null, tax } as const;
+      const allowancesCharges = [{ ...off, amount: { way: 'fixed', amount_minor: 10 } as const }];
+      const root = ublRoot(ublInvoice(ofLines([line(code, '20', { price: '5' })], { allowancesCharges })));
+      const percents = [...root.getElementsByTagName('cbc:Percent')].map(({ textContent }) => textContent);
+      expect(percents).toEqual(['0', '0', '0']);
+    },
+  );
+
+  it('sums what comes off and on even where it comes to nothing, and says none where there is none (BR-CO-11, BR-CO-12)', () => {
+    const nothing = (charge: boolean) => ({
+      ...{ charge, reason: 'Settled', reasonCode: null, tax: { code: 'S', percent: '20' } as const },
+      amount: { way: 'fixed', amount_minor: 0 } as const,
+    });
+    const sums = (allowancesCharges: FrozenInvoice['allowancesCharges']) => {
+      const root = ublRoot(ublInvoice(ofLines([line('S', '20')], { allowancesCharges })));
+      return ['AllowanceTotalAmount', 'ChargeTotalAmount'].map((name) => textAt(root, `LegalMonetaryTotal/${name}`));
+    };
+    expect(sums([nothing(false)])).toEqual(['0.00', undefined]);
+    expect(sums([nothing(true)])).toEqual([undefined, '0.00']);
+    expect(sums([])).toEqual([undefined, undefined]);
+  });
+
+  it.each([
+    ['95', false, '95'],
+    ['FC', true, 'FC'],
+    ['FC', false, undefined],
+    ['95', true, undefined],
+    ['QQ', false, undefined],
+  ])('says a reason %s by its code where the list for it has one (charge: %s)', (reasonCode, charge, written) => {
+    const one = { charge, reason: 'Freight', reasonCode, amount: { way: 'fixed', amount_minor: 10 } } as const;
+    const root = ublRoot(ublInvoice(ofLines([line('S', '20', { allowancesCharges: [one] })])));
+    expect(textAt(root, 'InvoiceLine/AllowanceCharge/AllowanceChargeReasonCode')).toBe(written);
+    expect(textAt(root, 'InvoiceLine/AllowanceCharge/AllowanceChargeReason')).toBe('Freight');
+  });
+
+  it.each([
+    ['Order #12a# of May', 'Order # 12a# of May'],
+    ['Orders #12 and #13', 'Orders #12 and #13'],
+    ['#1234# first, then #abc#', '#1234# first, then #abc#'],
+  ])('claims no subject with a note: %s', (note, written) => {
+    expect(textAt(ublRoot(ublInvoice(ofLines([line('S', '20')], { note }))), 'Note')).toBe(written);
+  });
+
+  it('writes a country as the list has it, also where a supply within the Union went', () => {
+    const buyer = { ...frozen({}).buyer, country: 'XK' };
+    const root = ublRoot(ublInvoice(ofLines([line('K', '0')], { buyer })));
+    const country = 'Country/IdentificationCode';
+    expect(textAt(root, `AccountingCustomerParty/Party/PostalAddress/${country}`)).toBe('1A');
+    expect(textAt(root, `Delivery/DeliveryLocation/Address/${country}`)).toBe('1A');
+  });
+
   it('writes what a person typed as text, whatever it is, and no character XML has none for', () => {
     const name = 'A & B <script> ]]> "q" \u0001\u000b é\u{1F600}';
     const root = ublRoot(ublInvoice(ofLines([line('S', '20', { name })])));

@@ -4,7 +4,7 @@ import type { AllowanceOrCharge } from '#shared/invoices/invoice-lines';
 import { allowanceAmount } from '#shared/invoices/invoice-totals';
 import { currencyDigits } from '#shared/money/currency-digits';
 import { D, type MinorUnits } from '#shared/money/decimal';
-import type { TaxCode, TaxRate } from '#shared/money/tax-by-category';
+import { ratePercent, type TaxCode, type TaxRate } from '#shared/money/tax-by-category';
 import { textStyles, type PaperWords, type TableColumn, type TableRow } from '../../documents';
 
 /** An issued invoice and the words its paper is set in. */
@@ -23,8 +23,10 @@ function priceText({ invoice }: InvoiceOnPaper, price: string): string {
 const quantityText = ({ words }: InvoiceOnPaper, quantity: string, unit: string): string =>
   words.say('paper-invoice-quantity', { quantity: words.figure('number', Number(quantity)), unit });
 
-const taxText = ({ words }: InvoiceOnPaper, { code, percent }: TaxRate): string =>
-  Number(percent) > 0 ? words.say('paper-invoice-tax-of', { rate_percent: Number(percent) }) : code;
+const taxText = ({ words }: InvoiceOnPaper, tax: TaxRate): string => {
+  const rate_percent = Number(ratePercent(tax));
+  return rate_percent > 0 ? words.say('paper-invoice-tax-of', { rate_percent }) : tax.code;
+};
 
 /** What comes off or on, said in small print under its line, and as a row of its own for the document. */
 function allowanceText({ words }: InvoiceOnPaper, one: AllowanceOrCharge): string {
@@ -99,8 +101,8 @@ function exemptionText({ invoice, words }: InvoiceOnPaper, code: TaxCode): strin
 
 const taxSums = (paper: InvoiceOnPaper): Sum[] =>
   paper.invoice.totals.categories.map(({ tax, net_minor, tax_minor }) => ({
-    text: paper.words.say(Number(tax.percent) > 0 ? 'paper-invoice-tax-sum' : 'paper-invoice-untaxed', {
-      ...{ code: tax.code, rate_percent: Number(tax.percent), net_minor },
+    text: paper.words.say(Number(ratePercent(tax)) > 0 ? 'paper-invoice-tax-sum' : 'paper-invoice-untaxed', {
+      ...{ code: tax.code, rate_percent: Number(ratePercent(tax)), net_minor },
     }),
     note: exemptionText(paper, tax.code),
     amount: paper.words.money(tax_minor),

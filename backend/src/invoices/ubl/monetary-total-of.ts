@@ -2,9 +2,10 @@ import { exemptionOf } from '#shared/invoices/exemption-of';
 import type { FrozenInvoice } from '#shared/invoices/invoice';
 import type { AllowanceOrCharge } from '#shared/invoices/invoice-lines';
 import { allowanceAmount } from '#shared/invoices/invoice-totals';
+import { isReasonCode } from '#shared/invoices/reason-codes';
 import { currencyDigits } from '#shared/money/currency-digits';
 import { D, type DecimalText, type MinorUnits } from '#shared/money/decimal';
-import type { TaxRate } from '#shared/money/tax-by-category';
+import { ratePercent, type TaxRate } from '#shared/money/tax-by-category';
 import { textOf } from '#shared/money/text-of';
 import type { UblPart, UblValue } from './ubl-document';
 
@@ -19,10 +20,14 @@ const plain = (decimal: DecimalText): string => new D(decimal).toString();
 /** Category and rate. Outside the scope of VAT there is no rate (BR-O-05), without a tax the rate is written as 0 (BR-E-05 …). */
 export const categoryOf = (tax: TaxRate, inner: readonly (UblPart | null)[] = []): readonly (UblPart | null)[] => [
   ['ID', tax.code],
-  tax.code === 'O' ? null : ['Percent', plain(tax.percent)],
+  tax.code === 'O' ? null : ['Percent', plain(ratePercent(tax))],
   ...inner,
   ['TaxScheme', [['ID', 'VAT']]],
 ];
+
+/** Why, as a code of the lists; one they do not have is left out, the words stand beside it all the same. */
+const reasonCodeOf = ({ reasonCode, charge }: AllowanceOrCharge): string | null =>
+  reasonCode !== null && isReasonCode(reasonCode, charge) ? reasonCode : null;
 
 /** Allowance or charge of a line or, with its tax, of the document. */
 export function allowanceOf(invoice: FrozenInvoice, one: AllowanceOrCharge, tax: TaxRate | null): UblPart {
@@ -31,7 +36,7 @@ export function allowanceOf(invoice: FrozenInvoice, one: AllowanceOrCharge, tax:
     'AllowanceCharge',
     [
       ['ChargeIndicator', String(one.charge)],
-      ['AllowanceChargeReasonCode', one.reasonCode],
+      ['AllowanceChargeReasonCode', reasonCodeOf(one)],
       ['AllowanceChargeReason', one.reason],
       ['MultiplierFactorNumeric', amount.way === 'percent' ? plain(amount.percent) : null],
       ['Amount', amountOf(invoice, allowanceAmount(one))],
@@ -71,19 +76,24 @@ export const taxTotalOf = (invoice: FrozenInvoice): UblPart => [
   ],
 ];
 
-/** All totals of the document (BG-22); what is nothing and may be left out is left out. */
+/**
+ * All totals of the document (BG-22); what is nothing and may be left out is left out. Where something comes off or on its sum is there,
+ * even one of nothing (BR-CO-11, BR-CO-12).
+ */
 export function monetaryTotalOf(invoice: FrozenInvoice): UblPart {
-  const { totals, prepaid_minor, rounding_minor } = invoice;
+  const { totals, prepaid_minor, rounding_minor, allowancesCharges } = invoice;
   const amount = (minor: MinorUnits) => amountOf(invoice, minor);
   const unlessNothing = (minor: MinorUnits) => (minor === 0 ? null : amount(minor));
+  const where = (charge: boolean, minor: MinorUnits) =>
+    allowancesCharges.some((one) => one.charge === charge) ? amount(minor) : null;
   return [
     'LegalMonetaryTotal',
     [
       ['LineExtensionAmount', amount(totals.lineSum_minor)],
       ['TaxExclusiveAmount', amount(totals.net_minor)],
       ['TaxInclusiveAmount', amount(totals.gross_minor)],
-      ['AllowanceTotalAmount', unlessNothing(totals.allowances_minor)],
-      ['ChargeTotalAmount', unlessNothing(totals.charges_minor)],
+      ['AllowanceTotalAmount', where(false, totals.allowances_minor)],
+      ['ChargeTotalAmount', where(true, totals.charges_minor)],
       ['PrepaidAmount', unlessNothing(prepaid_minor)],
       ['PayableRoundingAmount', unlessNothing(rounding_minor)],
       ['PayableAmount', amount(totals.due_minor)],

@@ -1,3 +1,4 @@
+import { exchangeCountry } from '#shared/invoices/exchange-country';
 import type { FrozenInvoice } from '#shared/invoices/invoice';
 import type { UblPart } from './ubl-document';
 
@@ -12,7 +13,7 @@ function addressOf(lines: readonly string[], country: string): UblPart {
       ['StreetName', street],
       ['AdditionalStreetName', additional],
       ['AddressLine', [['Line', rest.join(', ')]]],
-      ['Country', [['IdentificationCode', country]]],
+      ['Country', [['IdentificationCode', exchangeCountry(country) ?? country]]],
     ],
   ];
 }

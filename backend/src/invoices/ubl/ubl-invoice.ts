@@ -1,3 +1,4 @@
+import { exchangeCountry } from '#shared/invoices/exchange-country';
 import type { FrozenInvoice } from '#shared/invoices/invoice';
 import { allowanceOf, lineOf, monetaryTotalOf, taxTotalOf } from './monetary-total-of';
 import { ublDocument, type UblPart } from './ubl-document';
@@ -42,14 +43,12 @@ function paymentMeansOf(invoice: FrozenInvoice): UblPart | null {
 /** A supply within the Union says where it went (BR-IC-12): the country of the buyer. */
 function deliveryOf({ deliveredOn, totals, buyer }: FrozenInvoice): UblPart {
   const isWithinUnion = totals.categories.some(({ tax }) => tax.code === 'K');
+  const country = exchangeCountry(buyer.country) ?? buyer.country;
   return [
     'Delivery',
     [
       ['ActualDeliveryDate', deliveredOn],
-      [
-        'DeliveryLocation',
-        [['Address', [['Country', [['IdentificationCode', isWithinUnion ? buyer.country : null]]]]]],
-      ],
+      ['DeliveryLocation', [['Address', [['Country', [['IdentificationCode', isWithinUnion ? country : null]]]]]]],
     ],
   ];
 }
@@ -67,6 +66,12 @@ const creditedOf = ({ credits }: FrozenInvoice): UblPart => [
   ],
 ];
 
+/** Three characters between two # would be read as the subject of the note (BR-CL-08), so they are set apart. */
+const withoutSubject = (note: string): string => note.replace(/^([^#]*#)([^#]{3}#)/u, '$1 $2');
+
+const noteOf = ({ note, closing }: FrozenInvoice): string =>
+  withoutSubject([note, closing].filter((text) => text.trim() !== '').join('\n'));
+
 /** The heads in the order of the schema, which differs between the two roots: a credit note has no due day of its own. */
 function headOf(invoice: FrozenInvoice): UblPart[] {
   const isInvoice = invoice.kind === 'invoice';
@@ -78,7 +83,7 @@ function headOf(invoice: FrozenInvoice): UblPart[] {
     ['IssueDate', invoice.issuedOn],
     ['DueDate', isInvoice ? invoice.dueOn : null],
     typeCode,
-    ['Note', [invoice.note, invoice.closing].filter((text) => text.trim() !== '').join('\n')],
+    ['Note', noteOf(invoice)],
     ['DocumentCurrencyCode', invoice.currency],
     ['BuyerReference', invoice.buyer.reference],
     [
