@@ -33,7 +33,6 @@ export const invoices = {
   'invoice-account-wrong': 'This IBAN does not add up. Please compare it with the bank’s.',
   'invoice-vat-form': 'A VAT number begins with the two letters of its country.',
   'invoice-country-unknown': 'No country has the letters {country}. Please choose one from the list.',
-  'invoice-country-unknown': 'No country has the letters {country}. Please choose one from the list.',
 
   // Drafts
   'invoice-is-issued': 'Invoice {number} has been issued. Issued papers stay as they are; a credit note corrects them.',
