@@ -38,6 +38,11 @@ beforeAll(async () => {
 }, 60_000);
 afterAll(() => api.stop());
 
+interface Opening {
+  readonly papers: ClientOverview;
+  readonly issue: ClientIssue | null;
+}
+
 const read = (visitor: Visitor, issueId: string) => visitor.call(readClientIssue, { params: { issueId } });
 const pageOf = async (visitor: Visitor, issueId: string): Promise<ClientIssue> =>
   (await read(visitor, issueId)).body as ClientIssue;
@@ -69,9 +74,22 @@ describe('A link', () => {
     const { issueId } = await sampleIssue(api.ours, api);
     const visitor = await api.stranger();
     const { token } = await linkTo(api.ours, api, issueId);
-    const begun = (await visitor.call(beginClientVisit, { body: { token } })).body as { papers: ClientOverview };
+    const begun = (await visitor.call(beginClientVisit, { body: { token } })).body as Opening;
     expect(begun.papers.jobs.flatMap(({ issues }) => issues.map(({ id }) => id))).toEqual([issueId]);
     expect(begun.papers).toEqual(await overviewOf(visitor));
+    expect(begun.issue).toEqual(await pageOf(visitor, issueId));
+  });
+
+  it('begins even where the paper that is read first cannot be read, which is said where that is opened', async () => {
+    const { issueId } = await sampleIssue(api.ours, api);
+    const { token } = await linkTo(api.ours, api, issueId);
+    const reading = jest.spyOn(api.app.estimates.frozen, 'read').mockRejectedValueOnce(new Error('planted'));
+    const visitor = await api.stranger();
+    const begun = (await visitor.call(beginClientVisit, { body: { token } })).body as Opening;
+    reading.mockRestore();
+    expect(begun.issue).toBeNull();
+    expect(begun.papers.jobs.flatMap(({ issues }) => issues.map(({ id }) => id))).toEqual([issueId]);
+    expect((await read(visitor, issueId)).status).toBe(200);
   });
 
   it('is read by many and worked once; what is asked meanwhile stands there all the same', async () => {

@@ -1,6 +1,7 @@
 import type { ClientActor } from '#shared/actor/client-actor';
 import type { ClientIssue } from '#shared/client-page/client-issue-schema';
 import type { ClientOverview } from '#shared/client-page/client-overview-schema';
+import { firstPaper } from '#shared/client-page/first-paper';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import type { Choice } from '#shared/estimates/draft';
 import type { Accounts } from '../accounts';
@@ -41,6 +42,13 @@ export class ClientPageService {
       jobs: await Promise.all(jobs.map((job) => this.jobOf(client, job, at))),
       invoices: [...(await this.parts.invoices.of(client))],
     };
+  }
+
+  /** What a visit begins with, in one answer; of an issue that cannot be read it is told where it is opened. */
+  async opening(client: ClientActor): Promise<{ papers: ClientOverview; issue: ClientIssue | null }> {
+    const papers = await this.overview(client);
+    const first = firstPaper(papers);
+    return { papers, issue: first === undefined ? null : await this.issue(client, first).catch(() => null) };
   }
 
   async logo({ workshopId }: ClientActor): Promise<FileAnswer> {

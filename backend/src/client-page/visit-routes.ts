@@ -10,7 +10,7 @@ type Ways = Pick<Agreements, 'visits' | 'signIns'>;
 interface Parts {
   readonly ways: Ways;
   readonly throttle: Accounts['throttle'];
-  readonly pages: Pick<ClientPageService, 'overview'>;
+  readonly pages: Pick<ClientPageService, 'opening'>;
 }
 
 export const visitRoutes = ({ ways: { visits, signIns }, throttle, pages }: Parts): Route[] => [
@@ -22,7 +22,7 @@ export const visitRoutes = ({ ways: { visits, signIns }, throttle, pages }: Part
     if (!client) throw new Rejection('gone', 'access-ended');
     await throttle.linkOpened(from.address);
     await session.beginVisit(visit);
-    return { token: session.forgeryToken, papers: await pages.overview(client) };
+    return { token: session.forgeryToken, ...(await pages.opening(client)) };
   }),
   mount(askForClientSignIn, async ({ body, from }) => {
     await throttle.beginLetter(body.email, from.address);

@@ -7,11 +7,9 @@ import { answeredAhead } from './answered-ahead';
 import { askedAhead } from './asked-ahead';
 
 const address = '/api/client/overview';
-const arrived = (body: unknown, status = 200, headers: HeadersInit = {}) =>
-  ({
-    ...{ ok: status < 400, status, url: address, headers: new Map(Object.entries(headers)) },
-    json: () => Promise.resolve(body),
-  }) as unknown as Response;
+const arrived = (body: unknown, status = 200, headers: Readonly<Record<string, string>> = {}) => ({
+  ...{ ok: status < 400, status, url: address, headers, body },
+});
 
 describe('answeredAhead', () => {
   const answerTo = jest.spyOn(askedAhead, 'answerTo');

@@ -1,67 +1,107 @@
 import type { ClientOverview } from '#shared/client-page/client-overview-schema';
 import type { ClientIssue } from '#shared/client-page/client-issue-schema';
-import { firstPaper } from './first-paper';
-import { writeOpeningHead } from './opening-head';
+import { writeIssueHead, writePapersHead } from './opening-head';
+
+/** What came of a request, as far as a call reads it. */
+export interface Answer {
+  readonly ok: boolean;
+  readonly status: number;
+  readonly url: string;
+  readonly headers: Readonly<Record<string, string>>;
+  readonly body: unknown;
+}
+
+interface Visit {
+  readonly papers: ClientOverview;
+  readonly issue: ClientIssue | null;
+}
+
+interface Show {
+  readonly issue: (issue: ClientIssue) => void;
+  readonly papers: (papers: ClientOverview) => void;
+}
+
+const addressOfIssue = (issueId: string): string => `/api/client/issues/${issueId}`;
+const overview = '/api/client/overview';
+const visits = '/api/client/visits';
+
+async function answerOf(response: Response): Promise<Answer> {
+  const { ok, status, url, headers } = response;
+  return { ok, status, url, headers: Object.fromEntries(headers), body: await response.json() };
+}
 
 /**
- * What the first page of a client asks in any case, asked while the application itself is still on its way: each answer is given out
- * once. This file comes before everything else, so it imports no endpoints; its spec holds the addresses to theirs.
+ * What the first page of a client asks in any case, asked while the application itself is not there: each answer is given out once. This
+ * file comes before everything else, so it imports no endpoints; its spec holds the addresses to theirs.
  */
 export class AskedAhead {
-  private readonly answers = new Map<string, Promise<Response>>();
+  private readonly answers = new Map<string, Promise<Answer>>();
 
   constructor(
     private readonly ask: typeof fetch = (address, request) => fetch(address, request),
-    private readonly show: (issue: ClientIssue) => void = (issue) => writeOpeningHead(document, issue),
+    private readonly show: Show = {
+      issue: (issue) => writeIssueHead(document, issue),
+      papers: (papers) => writePapersHead(document, papers),
+    },
   ) {}
 
-  /** Begins the visit whose secret an address holds, or asks for the paper it shows. */
-  begin({ pathname, hash }: Pick<Location, 'pathname' | 'hash'>): void {
+  /** Begins the visit whose secret an address holds, or asks for the paper it shows. Done when the head of that stands, or none will. */
+  async begin({ pathname, hash }: Pick<Location, 'pathname' | 'hash'>): Promise<void> {
     const session = this.send('GET', '/api/session');
     const secret = pathname === '/client' ? hash.slice(1) : '';
-    if (secret === '') this.sendReading(pathname);
-    else void this.keep('POST', '/api/client/visits', this.visit(session, secret));
+    // What cannot be shown ahead is shown, or complained of, by the application.
+    await (secret === '' ? this.read(pathname) : this.visit(session, secret)).catch(() => undefined);
   }
 
   /** The answer to a request that was asked already. */
-  answerTo(method: string, address: string): Promise<Response> | undefined {
+  answerTo(method: string, address: string): Promise<Answer> | undefined {
     const answer = this.answers.get(`${method} ${address}`);
     this.answers.delete(`${method} ${address}`);
     return answer;
   }
 
+  private async visit(session: Promise<Answer>, secret: string): Promise<void> {
+    const answer = await this.keep('POST', visits, this.opened(session, secret));
+    if (!answer.ok) return;
+    const { papers, issue } = answer.body as Visit;
+    if (issue) this.show.issue(issue);
+    else this.show.papers(papers);
+  }
+
   /** After the session, not beside it: a visit is begun under a new one, and the later answer would put the former back. */
-  private async visit(session: Promise<Response>, secret: string): Promise<Response> {
-    const { token } = (await (await session).clone().json()) as { token: string };
+  private async opened(session: Promise<Answer>, secret: string): Promise<Answer> {
+    const { token } = (await session).body as { token: string };
     const headers = { 'content-type': 'application/json', 'x-csrf-token': token };
-    const answer = await this.ask('/api/client/visits', {
+    const answer = await this.ask(visits, {
       ...{ method: 'POST', headers, body: JSON.stringify({ token: secret }) },
-    });
-    if (answer.ok) {
-      const { papers } = (await answer.clone().json()) as { papers: ClientOverview };
-      this.sendReading(firstPaper(papers));
-    }
+    }).then(answerOf);
+    if (answer.ok) this.keepFirst(answer);
     return answer;
   }
 
-  private sendReading(page: string): void {
-    if (page === '/client/papers') void this.send('GET', '/api/client/overview');
-    // What cannot be shown ahead is shown, or complained of, by the application.
-    if (page.startsWith('/client/issues/'))
-      this.send('GET', `/api${page}`)
-        .then(this.heardOf)
-        .catch(() => undefined);
+  /** The paper that is read first came with the visit: nobody has to ask for it. */
+  private keepFirst(answer: Answer): void {
+    const { papers, issue } = answer.body as Visit;
+    const [address, body] = issue ? [addressOfIssue(issue.issue.id), issue] : [overview, papers];
+    void this.keep('GET', address, Promise.resolve({ ...answer, url: address, body }));
   }
 
-  private readonly heardOf = async (answer: Response): Promise<void> => {
-    if (answer.ok) this.show((await answer.clone().json()) as ClientIssue);
-  };
-
-  private send(method: string, address: string): Promise<Response> {
-    return this.keep(method, address, this.ask(address, { method }));
+  private async read(page: string): Promise<void> {
+    if (page === '/client/papers') await this.shown(overview, this.show.papers);
+    const [, issueId] = /^\/client\/issues\/([^/]+)$/.exec(page) ?? [];
+    if (issueId) await this.shown(addressOfIssue(issueId), this.show.issue);
   }
 
-  private keep(method: string, address: string, answer: Promise<Response>): Promise<Response> {
+  private async shown<T>(address: string, show: (paper: T) => void): Promise<void> {
+    const { ok, body } = await this.send('GET', address);
+    if (ok) show(body as T);
+  }
+
+  private send(method: string, address: string): Promise<Answer> {
+    return this.keep(method, address, this.ask(address, { method }).then(answerOf));
+  }
+
+  private keep(method: string, address: string, answer: Promise<Answer>): Promise<Answer> {
     // Whoever takes it asks again by themselves; a failure nobody takes is none.
     answer.catch(() => undefined);
     this.answers.set(`${method} ${address}`, answer);

@@ -34,7 +34,7 @@ describe('ClientVisitPage', () => {
     expect(replaceState).toHaveBeenCalledWith('/client');
     const begun = page.http.expectOne({ method: 'POST', url: '/api/client/visits' });
     expect(begun.request.body).toEqual({ token: 'secret-of-the-link' });
-    begun.flush({ token: 'token-of-the-visit', papers: overview() });
+    begun.flush({ token: 'token-of-the-visit', papers: overview(), issue: null });
     await page.settle();
     expect(TestBed.inject(Session).requestToken()).toBe('token-of-the-visit');
     page.http.expectNone(overviewUrl);

@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, inject, resource } from '@angular/c
 import { Router } from '@angular/router';
 import { readClientOverview } from '#shared/client-page/client-issues-endpoints';
 import type { ClientOverview } from '#shared/client-page/client-overview-schema';
+import { firstPaper } from '#shared/client-page/first-paper';
 import { beginClientVisit } from '#shared/client-page/visits-endpoints';
 import { Api } from '../core/api/api';
 import { fragmentToken } from '../core/routing/fragment-token';
@@ -9,7 +10,6 @@ import { Session } from '../core/session/session';
 import { Skeleton } from '../ui/page/skeleton';
 import { ClientFrame } from './client-frame';
 import { ClientRefused } from './client-refused';
-import { firstPaper } from './first-paper';
 
 /** Where the link of a letter leads: begins the visit, and goes on to the one paper that waits for an answer, or to all of them. */
 @Component({
@@ -37,7 +37,8 @@ export class ClientVisitPage {
 
   private async begin(): Promise<true> {
     const papers = this.token ? await this.opened(this.token) : await this.api.call(readClientOverview, {});
-    await this.router.navigateByUrl(firstPaper(papers), { replaceUrl: true });
+    const first = firstPaper(papers);
+    await this.router.navigateByUrl(first ? `/client/issues/${first}` : '/client/papers', { replaceUrl: true });
     return true;
   }
 

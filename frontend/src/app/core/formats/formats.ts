@@ -8,6 +8,7 @@ import { formatsFor } from '#shared/units/formats-for';
 import { trueMinus } from '#shared/units/true-minus';
 import { Session } from '../session/session';
 import { CATALOGUE } from './catalogue';
+import { dateFormat } from './date-format';
 import { dayStyles, type DayStyle } from './day-styles';
 import { SHOWN_CURRENCY } from './shown-currency';
 import { strangerSettings } from './stranger-settings';
@@ -121,22 +122,18 @@ export class Formats {
 
   /** A day (2026-06-04) in words. */
   day(day: string, style: DayStyle = 'dated'): string {
-    return new Intl.DateTimeFormat(this.locale(), { ...dayStyles[style], timeZone: 'UTC' }).format(
-      new Date(`${day}T00:00:00Z`),
-    );
+    return dateFormat(this.locale(), { ...dayStyles[style], timeZone: 'UTC' }).format(new Date(`${day}T00:00:00Z`));
   }
 
   /** The day of a moment, in the workshop's time zone. */
   dayOf(moment: string | Date, style: DayStyle = 'dated'): string {
-    return new Intl.DateTimeFormat(this.locale(), { ...dayStyles[style], timeZone: this.timeZone() }).format(
-      new Date(moment),
-    );
+    return dateFormat(this.locale(), { ...dayStyles[style], timeZone: this.timeZone() }).format(new Date(moment));
   }
 
   /** The time of day of a moment, in the workshop's time zone. */
   time(moment: string | Date): string {
     const options = { hour: '2-digit', minute: '2-digit', timeZone: this.timeZone() } as const;
-    return new Intl.DateTimeFormat(this.locale(), options).format(new Date(moment));
+    return dateFormat(this.locale(), options).format(new Date(moment));
   }
 }
 
