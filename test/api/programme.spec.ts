@@ -212,7 +212,7 @@ describe('A programme', () => {
     const three = (await keep(1, { hands: [{ ...hands[1], crew: 3 }] })).body as ProgrammeAnswer;
     expect(three.findings.map(({ code }) => code)).toContain('programme-crew-short');
     const twice = await keep(2, { hands: [hands[0], hands[0]] });
-    expect([twice.status, twice.body.errors[0].pointer]).toEqual([400, '/hands/1']);
+    expect([twice.status, twice.body.errors[0].path]).toEqual([400, ['hands', 1]]);
   });
 
   test('goes with its job', async () => {
@@ -236,7 +236,10 @@ describe('Planned in the afternoon', () => {
     await signInAgain();
   }
   /** A session ends after a while, whoever moved the clock. */
-  const signInAgain = () => owner.signIn(api.ours.people.owner.email, password);
+  const signInAgain = async () => {
+    await owner.arrive();
+    expect((await owner.signIn(api.ours.people.owner.email, password)).status).toBe(200);
+  };
   const nowIn = (answer: { startsAt: string }) =>
     Math.ceil((api.clock.now().getTime() - Date.parse(answer.startsAt)) / 60_000);
   const starts = (plan: ProgrammeAnswer['plan']) => (plan?.tasks ?? []).map(({ start_minutes }) => start_minutes);
@@ -282,6 +285,7 @@ describe('Planned in the afternoon', () => {
     const { request, version } = await programmeOf(api.ours, estimateId);
     const plan = solved(request);
     api.clock.move({ minutes: 120 });
+    await signInAgain();
     const refused = await owner.call(keepPlan, { ...at(estimateId), version, body: plan });
     const first = request.tasks.find(
       ({ id }) => id === plan.tasks.find(({ start_minutes }) => start_minutes === request.start_minutes)?.taskId,
@@ -290,6 +294,7 @@ describe('Planned in the afternoon', () => {
       expect.objectContaining({ message: `${first?.name ?? ''} would begin in the past.` }),
     );
     api.clock.move({ minutes: -90 });
+    await signInAgain();
     const kept = await told<ProgrammeAnswer>(owner, keepPlan, { ...at(estimateId), version, body: plan });
     expect(kept.plan?.tasks).toEqual(plan.tasks);
   });
@@ -583,7 +588,7 @@ describe('A calendar for other programs', () => {
     const second = (at: Date) => `${at.toISOString().slice(0, 19)}Z`;
     const keptAt = api.clock.now();
     expect(await saying()).toEqual({ sequences: [0], modified: [second(keptAt)] });
-    api.clock.move({ minutes: 30 });
+    api.clock.move({ minutes: 20 });
     const inputs = { ...programme.inputs, inHand_days: 3 };
     await told(owner, keepProgramme, { ...at(estimateId), version: programme.version, body: inputs });
     expect(await saying()).toEqual({ sequences: [0], modified: [second(keptAt)] });
