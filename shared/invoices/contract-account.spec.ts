@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import type { Contract, ContractPart } from '#shared/agreements/contract';
-import { creditedRest, restRounding } from '#shared/invoices/claimed-again';
+import { creditedRest, restRounding } from '#shared/invoices/credited-rest';
 import { isStanding, takenClaims, type ClaimingInvoice } from '#shared/invoices/claiming-invoice';
 import { claimRounding, contractAccount, partAccount } from '#shared/invoices/contract-account';
 import { claimedAmounts, type PlannedClaim, type StageClaim } from '#shared/invoices/stage-claim';

@@ -1,5 +1,5 @@
 import type { Contract, ContractPart } from '#shared/agreements/contract';
-import { creditedRest } from '#shared/invoices/claimed-again';
+import { creditedRest } from '#shared/invoices/credited-rest';
 import { takenClaims, type ClaimingInvoice } from '#shared/invoices/claiming-invoice';
 import { claimedAmounts, claimedDue, type PlannedClaim, type StageClaim } from '#shared/invoices/stage-claim';
 import { uncoveredWork, type WorkSpan } from '#shared/invoices/uncovered-work';

@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import type { Contract, ContractPart } from '#shared/agreements/contract';
 import { holdsTogether } from '#shared/agreements/holds-together';
-import { Books } from '#shared/invoices/books-for-specs';
+import { ContractBooksForSpecs } from '#shared/invoices/contract-books-for-specs';
 import { contractAccount } from '#shared/invoices/contract-account';
 import { fittingClaim } from '#shared/invoices/fitting-claim';
 import { claimedDue } from '#shared/invoices/stage-claim';
@@ -54,7 +54,7 @@ function agreed(base: ContractPart, varied: readonly ContractPart[]): ContractPa
   );
 }
 
-function raiseAll(books: Books): void {
+function raiseAll(books: ContractBooksForSpecs): void {
   for (let step = 0; step < 200; step += 1) {
     const open = books.parts.flatMap((part) => books.next(part).map((claim) => ({ part, claim })));
     if (open.length === 0) return;
@@ -68,7 +68,7 @@ const lawful = (
   parts: readonly ContractPart[],
   deeds: readonly { at: number; credits: string; net_minor: number }[],
 ) => {
-  const books = new Books(parts);
+  const books = new ContractBooksForSpecs(parts);
   for (const { at, credits, net_minor } of deeds) {
     const part = parts[at % parts.length];
     const next = books.next(part);
@@ -116,7 +116,7 @@ describe('a contract of which variations take away', () => {
       retention_percent: 0,
     });
     const plain = partOf('variation', [-420_00, 0, 0]);
-    const books = new Books([base, plain]);
+    const books = new ContractBooksForSpecs([base, plain]);
     const [taken] = books.next(plain);
     expect(books.claim(plain, taken)).toBe(false);
     books.claim(base, { of: 'deposit' });

@@ -1,6 +1,6 @@
 import type { Contract, ContractPart } from '#shared/agreements/contract';
 import { buyerOf } from '#shared/invoices/buyer-of';
-import { restRounding, type CreditedRest } from '#shared/invoices/claimed-again';
+import { restRounding, type CreditedRest } from '#shared/invoices/credited-rest';
 import { claimRounding } from '#shared/invoices/contract-account';
 import type { InvoiceContent } from '#shared/invoices/invoice';
 import { claimedAmounts, type ClaimedAmount, type PlannedClaim } from '#shared/invoices/stage-claim';

@@ -1,7 +1,7 @@
 import { v7 as newId } from 'uuid';
 import type { Actor } from '#shared/actor/actor';
 import type { ContractPart } from '#shared/agreements/contract';
-import { creditedRest } from '#shared/invoices/claimed-again';
+import { creditedRest } from '#shared/invoices/credited-rest';
 import { takenClaims, type ClaimingInvoice } from '#shared/invoices/claiming-invoice';
 import { claimRounding, contractAccount, partAccount } from '#shared/invoices/contract-account';
 import type { ContractAccountAnswer } from '#shared/invoices/contract-account-endpoints';

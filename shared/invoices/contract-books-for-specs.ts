@@ -1,5 +1,5 @@
 import type { ContractPart } from '#shared/agreements/contract';
-import { creditedRest, restRounding } from '#shared/invoices/claimed-again';
+import { creditedRest, restRounding } from '#shared/invoices/credited-rest';
 import { takenClaims, type ClaimingInvoice } from '#shared/invoices/claiming-invoice';
 import { claimRounding, partAccount } from '#shared/invoices/contract-account';
 import { fittingClaim } from '#shared/invoices/fitting-claim';
@@ -19,7 +19,7 @@ interface Kept {
 const names = { work: 'Work', recovered: 'Deposit recovered', retained: 'Held back' };
 
 /** The books of one contract in small, kept by the rules of the house: what the server does with rows, without them. */
-export class Books {
+export class ContractBooksForSpecs {
   private kept: Kept[] = [];
   private giving: ClaimingInvoice[] = [];
 
