@@ -22,8 +22,10 @@ const node = (name) => ({
   transformIgnorePatterns: ['node_modules/(?!(icosphere|pdfjs-dist)/)'],
 });
 
+/** Threads start from what `build-programs.mjs` put together: read from the sources each start would take seconds. */
 const onDatabase = (name) => ({
   ...node(name),
+  moduleNameMapper: { '/threads/thread-file$': '<rootDir>/test/programs/thread-file.ts' },
   globalSetup: '<rootDir>/test/database/jest-set-up.mjs',
   globalTeardown: '<rootDir>/test/database/jest-tear-down.mjs',
 });

@@ -4,16 +4,18 @@ import { fileURLToPath, pathToFileURL } from 'node:url';
 
 const root = join(dirname(fileURLToPath(import.meta.url)), '../..');
 
+/** What runs in a thread of its own. */
+export const threads = {
+  'risk-worker': 'backend/src/estimates/risk-worker.ts',
+  'paper-worker': 'backend/src/documents/paper-worker.ts',
+  'invoice-paper-worker': 'backend/src/invoices/invoice-paper-worker.ts',
+  'programme-worker': 'backend/src/programme/programme-worker.ts',
+};
+
 /** Packages stay outside, `#shared` and everything of ours goes in. Threads stand beside the server, where `thread-file.ts` looks. */
 const options = {
   absWorkingDir: root,
-  entryPoints: {
-    main: 'backend/src/main.ts',
-    'risk-worker': 'backend/src/estimates/risk-worker.ts',
-    'paper-worker': 'backend/src/documents/paper-worker.ts',
-    'invoice-paper-worker': 'backend/src/invoices/invoice-paper-worker.ts',
-    'programme-worker': 'backend/src/programme/programme-worker.ts',
-  },
+  entryPoints: { main: 'backend/src/main.ts', ...threads },
   outdir: 'dist/server',
   bundle: true,
   platform: 'node',
@@ -24,8 +26,8 @@ const options = {
   logLevel: 'warning',
 };
 
-/** Bundles the server into dist/server. */
-export const buildServer = () => build(options);
+/** Bundles the server into dist/server, or other programs of ours into another folder. */
+export const buildServer = (others = {}) => build({ ...options, ...others });
 
 /** Bundles again at every change and says so. */
 export async function watchServer(onBuilt) {

@@ -1,8 +1,8 @@
 import { fork, type ChildProcess } from 'node:child_process';
 import { once } from 'node:events';
-import { join } from 'node:path';
 import type { Endpoint } from '#shared/actor/endpoint';
 import { endpoints } from '#shared/endpoints';
+import { builtProgram } from '../programs/built-program';
 import { allRows } from './rows/all-rows';
 import { startApi, type Api } from './start-api';
 import { sumsOfRows } from './sums-of-rows';
@@ -34,7 +34,7 @@ interface Doomed {
 }
 
 async function startDoomed(): Promise<Doomed> {
-  const child = fork(join(__dirname, 'serve-until-committed.ts'), settings, { execArgv: ['--import', 'tsx'] });
+  const child = fork(builtProgram('serve-until-committed'), settings);
   const [port] = (await once(child, 'message')) as [number];
   return { child, port };
 }

@@ -4,6 +4,7 @@ import { join } from 'node:path';
 import { endLeftover, installDatabase, startDatabase } from '../../backend/bin/database-server.mjs';
 import { freePort } from '../../backend/bin/free-port.mjs';
 import { commandOf } from '../../backend/bin/running-process.mjs';
+import { buildPrograms } from '../programs/build-programs.mjs';
 
 const prefix = 'bolewright-test-';
 
@@ -21,7 +22,7 @@ async function clearLeftovers() {
 /** Starts one throw-away MariaDB for the whole run; each Jest worker makes databases of its own on it. */
 export default async function setUp() {
   if (process.env.TEST_DATABASE_SERVER) return;
-  await clearLeftovers();
+  await Promise.all([clearLeftovers(), buildPrograms()]);
   const folder = mkdtempSync(join(tmpdir(), prefix));
   writeFileSync(join(folder, 'owner.pid'), String(process.pid));
   await installDatabase(join(folder, 'database'));

@@ -3,7 +3,7 @@ import type { Snapshot, SnapshotVaried } from '#shared/estimates/snapshot';
 import { jobNumber, type NamedJobRow } from '../jobs';
 import type { EstimateRow } from './estimate-model';
 import { thawedSnapshot } from './frozen-snapshot';
-import type { IssueParts } from './issue-service';
+import type { IssueParts } from './issue-parts';
 import { snapshotOf } from './snapshot-of';
 import type { WholeEstimate } from './whole-estimate';
 

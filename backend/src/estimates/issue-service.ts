@@ -7,39 +7,18 @@ import { chosenNames } from '#shared/estimates/chosen-names';
 import type { Choice } from '#shared/estimates/draft';
 import { issueLetter } from '#shared/estimates/issue-letter';
 import { lineDifferences, type LineDifference, type NamedLines } from '#shared/estimates/line-differences';
-import type { Snapshot, SnapshotProgramme } from '#shared/estimates/snapshot';
+import type { Snapshot } from '#shared/estimates/snapshot';
 import { Rejection } from '#shared/problems/rejection';
 import type { Doer } from '../audit';
-import type { FileStore } from '../platform/files/file-store';
 import { dayOfInstant } from '#shared/calendar/day-of-instant';
-import type { AgreedChoices } from './agreed-choices';
-import type { ContractHolding } from './contract-holding';
 import type { EstimateRow } from './estimate-model';
-import type { EstimateParts, EstimateService } from './estimate-service';
 import { presentEstimate } from './estimate-presenter';
 import { frozenSnapshot, thawedSnapshot, wholeOfSnapshot } from './frozen-snapshot';
 import { IssueFreezing } from './issue-freezing';
+import type { IssueParts } from './issue-parts';
 import type { IssueRow } from './issue-model';
-import type { PaperMaker } from './paper-maker';
 import { mayBeIssued, mayBeMarked } from './issue-policy';
 import { presentFrozenDates } from './issue-presenter';
-import type { IssueRepository } from './issue-repository';
-
-/** The programme of an estimate as an issue freezes it; a later feature supplies it. Null where no plan holds. */
-export type FrozenProgramme = (workshopId: string, estimateId: string) => Promise<SnapshotProgramme | null>;
-
-export interface IssueParts extends Pick<
-  EstimateParts,
-  'estimates' | 'cards' | 'jobs' | 'workshops' | 'audit' | 'clock'
-> {
-  readonly drafts: EstimateService;
-  readonly issues: IssueRepository;
-  readonly files: FileStore;
-  readonly papers: PaperMaker;
-  readonly programme: FrozenProgramme;
-  readonly choices: AgreedChoices;
-  readonly mustHold: ContractHolding;
-}
 
 export interface IssueRequest {
   readonly version: number;

@@ -1,4 +1,4 @@
-import type { WhereOptions } from 'sequelize';
+import { Op, type WhereOptions } from 'sequelize';
 import type { JobOrder, JobState } from '#shared/jobs/job-schema';
 import type { Database } from '../platform/database/database';
 import { ListedRows } from '../platform/database/listed-rows';
@@ -28,6 +28,10 @@ export class JobRepository extends ListedRows<JobRow> {
     const filter: WhereOptions<JobRow> = { ...(state ? { state } : {}), ...(clientId ? { clientId } : {}) };
     const where = state || clientId ? { where: filter } : {};
     return this.pageInOrder(workshopId, { ...asked, ...where, order: jobListOrders[order] });
+  }
+
+  several(workshopId: string, ids: readonly string[]): Promise<JobRow[]> {
+    return this.list(workshopId, { where: { id: { [Op.in]: [...ids] } } });
   }
 
   /** Writes down the words by which the job is found, those of its client's name among them. */

@@ -1,4 +1,3 @@
-import { Op } from 'sequelize';
 import type { Page } from '../platform/database/workshop-rows';
 import { Rejection } from '#shared/problems/rejection';
 import type { ClientRepository } from './client-repository';
@@ -18,8 +17,7 @@ export class NamedJobs {
   }
 
   async several(workshopId: string, jobIds: readonly string[]): Promise<NamedJobRow[]> {
-    const where = { id: { [Op.in]: [...jobIds] } };
-    return this.named(workshopId, jobIds.length === 0 ? [] : await this.jobs.list(workshopId, { where }));
+    return this.named(workshopId, await this.jobs.several(workshopId, jobIds));
   }
 
   async get(workshopId: string, jobId: string): Promise<NamedJobRow> {

@@ -6,6 +6,7 @@ import { join } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
 import { SMTPServer } from 'smtp-server';
 import { freshDatabase } from '../../../../test/database/fresh-database';
+import { builtProgram } from '../../../../test/programs/built-program';
 import { systemClock } from '../clock/clock';
 import { readConfig } from '../config/config';
 import { Database } from '../database/database';
@@ -67,10 +68,7 @@ const waiting = async (): Promise<number> =>
 async function workUntilKilled(): Promise<void> {
   const before = received.length;
   const given = Object.entries(settings).map(([name, value]) => `${name}=${value}`);
-  const worker = fork(join(__dirname, 'mail-until-killed.ts'), [smtpUrl, ...given], {
-    execArgv: ['--import', 'tsx'],
-    stdio: 'ignore',
-  });
+  const worker = fork(builtProgram('mail-until-killed'), [smtpUrl, ...given], { stdio: 'ignore' });
   const ended = new Promise((resolve) => worker.once('exit', resolve));
   while (received.length < before + 3) await pause(5);
   worker.kill('SIGKILL');

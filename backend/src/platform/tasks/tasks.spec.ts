@@ -1,8 +1,8 @@
 import { setTimeout as pause } from 'node:timers/promises';
 import { fork } from 'node:child_process';
-import { join } from 'node:path';
 import { freshDatabase } from '../../../../test/database/fresh-database';
 import { MovingClock } from '../../../../test/api/moving-clock';
+import { builtProgram } from '../../../../test/programs/built-program';
 import { Database } from '../database/database';
 import { openLog } from '../log/log';
 import { Tasks } from './tasks';
@@ -208,10 +208,7 @@ describe('a worker that was started', () => {
 test('a worker that is killed loses nothing: what it had in hand is done by the next', async () => {
   for (let n = 0; n < 40; n++) await add('recorded', { n });
   for (let kill = 0; kill < 3; kill++) {
-    const worker = fork(join(__dirname, 'work-until-killed.ts'), [url], {
-      execArgv: ['--import', 'tsx'],
-      stdio: 'ignore',
-    });
+    const worker = fork(builtProgram('work-until-killed'), [url], { stdio: 'ignore' });
     await new Promise((resolve) => worker.once('message', resolve));
     await pause(60);
     const ended = new Promise((resolve) => worker.once('exit', resolve));

@@ -6,6 +6,7 @@ import { shapeDefaults } from '#shared/measure/shape-defaults';
 import type { Role } from '#shared/actor/role';
 import { EstimateServer, ids, workspaceOn } from '../../test/estimate-server';
 import { signIn, words } from '../../test/sign-in';
+import { UnfinishedEntries } from './draft/unfinished-entries';
 import { EstimateStore } from './estimate-store';
 import { MeasurePage } from './measure-page';
 
@@ -145,7 +146,7 @@ describe('MeasurePage', () => {
     await open();
     await type('Length', '1500');
     await type('Length', '15 foo');
-    expect(store.giveUpUnfinished(ids.edge)).toBe(true);
+    expect(TestBed.inject(UnfinishedEntries).forget(ids.edge)).toBe(true);
     await settle();
     expect(field('Length').value).toBe('1500');
     store.undo();
