@@ -47,7 +47,7 @@ function durationWriter({ worded }: Pen): Write {
 const areaIn =
   ({ worded }: Pen, code: WordCode) =>
   (size: number, digits: number): string =>
-    worded(code, size, digits, size === 0 ? 0 : digits);
+    worded(code, size, size === 0 ? 0 : { exactly: digits });
 
 const metricArea = (pen: Pen): Write => {
   const [small, large] = [areaIn(pen, 'unit-square-centimetres'), areaIn(pen, 'unit-square-metres')];

@@ -20,8 +20,8 @@ export interface Pen {
   readonly number: (figure: number, most: number, least?: number) => string;
   /** A figure that is already text, with its unit. */
   readonly withUnit: (code: WordCode, figure: string, count?: number) => string;
-  /** A number with its unit, in the plural where the unit is counted; with at most and at least so many decimals. */
-  readonly worded: (code: WordCode, figure: number, most?: number, least?: number) => string;
+  /** A number with its unit, in the plural where the unit is counted; with at most so many decimals, or exactly so many. */
+  readonly worded: (code: WordCode, figure: number, decimals?: number | { readonly exactly: number }) => string;
 }
 
 /** How many decimals a figure deserves by its size. */
@@ -47,7 +47,9 @@ export function penFor(settings: ReaderSettings): Pen {
   const number = numberWriter(settings.locale);
   const sayUnit = say(settings.catalogue ?? en, { locale: settings.locale, write: (_unit, figure) => String(figure) });
   const withUnit: Pen['withUnit'] = (code, figure, count = 0) => sayUnit(code, { figure, count });
-  const worded: Pen['worded'] = (code, figure, most = decimalsFor(figure), least = 0) =>
-    withUnit(code, number(figure, most, least), Number(figure.toFixed(most)));
+  const worded: Pen['worded'] = (code, figure, decimals = decimalsFor(figure)) => {
+    const [most, least] = typeof decimals === 'number' ? [decimals, 0] : [decimals.exactly, decimals.exactly];
+    return withUnit(code, number(figure, most, least), Number(figure.toFixed(most)));
+  };
   return { settings, number, withUnit, worded };
 }

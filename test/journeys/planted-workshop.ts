@@ -218,16 +218,8 @@ const unmeasured = { count: 1, length_mm: null, girth_mm: null, area_mm2: null, 
 
 /** A line whose quantity of 2 m² is reckoned from what was measured. */
 const measuredExtra = (taxCategoryId: string, measured: MeasuredWork): ExtraLine => ({
-  ...{
-    ...anyExtra(),
-    taxCategoryId,
-    kind: 'paid-quantity',
-    rule: 'x',
-    quantity: '2',
-    unit: 'm²',
-    price: '3',
-    measured,
-  },
+  ...anyExtra(),
+  ...{ taxCategoryId, kind: 'paid-quantity', rule: 'x', quantity: '2', unit: 'm²', price: '3', measured },
 });
 
 const extrasOf = (taxCategoryId: string): ExtraLine[] => [
@@ -238,7 +230,9 @@ const extrasOf = (taxCategoryId: string): ExtraLine[] => [
     typed: { 'measures.0.length_mm': 'x', 'measures.0.girth_mm': 'x' },
   }),
   measuredExtra(taxCategoryId, {
-    ...{ rule: 'weighted', measures: [{ ...unmeasured, area_mm2: 2_000_000 }], typed: { 'measures.0.area_mm2': 'x' } },
+    rule: 'weighted',
+    measures: [{ ...unmeasured, area_mm2: 2_000_000 }],
+    typed: { 'measures.0.area_mm2': 'x' },
   }),
   { ...anyExtra(), taxCategoryId, kind: 'bought-in', cost: '10' },
 ];

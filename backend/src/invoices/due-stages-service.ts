@@ -29,19 +29,20 @@ interface Facts {
 }
 
 type Listed = DueStage & { readonly key: string };
+type ListedPart = Pick<Contract, 'currency'> & { readonly part: ContractPart };
 
 /** A deposit falls due on acceptance; everything else on its planned day, or when its milestone or share of the work is reached. */
 const dueOn = ({ claim }: NextClaim, part: ContractPart, planned: string | undefined): string | null =>
   planned ?? (claim.of === 'deposit' ? part.acceptedOn : null);
 
-function listed(job: NamedJobRow, contract: Contract, part: ContractPart, facts: Facts): Listed[] {
+function listed(job: NamedJobRow, { part, currency }: ListedPart, facts: Facts): Listed[] {
   const { issueId, kind, number, title, acceptedOn } = part;
   return partAccount(part, facts.claims).next.map((next, place) => {
     const day = dueOn(next, part, facts.plannedOn(issueId, claimKey(next.claim)));
     return {
       ...{ jobId: job.id, jobNumber: jobNumber(job), jobTitle: job.title },
       ...{ clientId: job.clientId, clientName: job.clientName },
-      ...{ issueId, kind, number, title, currency: contract.currency, dueOn: day },
+      ...{ issueId, kind, number, title, currency, dueOn: day },
       ...next,
       // What has no day stands at the end, in the order it was agreed.
       key: [day ?? '9999-12-31', acceptedOn, issueId, String(place).padStart(3, '0')].join(' '),
@@ -70,9 +71,9 @@ export class DueStagesService {
       part.gross_minor !== (standing.get(part.issueId) ?? 0);
     const contracts = await this.parts.contracts(workshopId, isOpen);
     const facts = await this.facts(workshopId, contracts);
-    const stages = contracts.flatMap((contract) => {
-      const job = facts.jobs.get(contract.jobId);
-      return job ? contract.parts.flatMap((part) => listed(job, contract, part, facts)) : [];
+    const stages = contracts.flatMap(({ jobId, currency, parts }) => {
+      const job = facts.jobs.get(jobId);
+      return job ? parts.flatMap((part) => listed(job, { part, currency }, facts)) : [];
     });
     return stages.sort((one, other) => (one.key < other.key ? -1 : 1));
   }
