@@ -25,31 +25,17 @@ import { Skeleton } from '../ui/page/skeleton';
 import { ClientFrame } from './client-frame';
 import { ClientIssueStore } from './client-issue-store';
 import { ClientRefused } from './client-refused';
-import {
-  ClientChoices,
-  ClientDecline,
-  ClientLines,
-  ClientPayments,
-  ClientPieces,
-  ClientReview,
-  ClientThread,
-  FindingList,
-} from './later-parts';
+import { ClientDecline, ClientIssueRest, ClientReview } from './later-parts';
 
 /** An estimate as its client reads it: the piece, the choices, the price, the terms, questions, and the answer. */
 @Component({
   selector: 'app-client-issue-page',
   imports: [
-    ClientChoices,
     ClientDecline,
     ClientFrame,
-    ClientLines,
-    ClientPayments,
-    ClientPieces,
+    ClientIssueRest,
     ClientRefused,
     ClientReview,
-    ClientThread,
-    FindingList,
     MatButton,
     NgTemplateOutlet,
     RouterLink,
@@ -82,31 +68,13 @@ export class ClientIssuePage {
       query: { choice: this.store.choice().join(',') },
     }),
   );
-  protected readonly care = computed(() =>
-    (this.store.price()?.care ?? []).map((code) => this.words.say(code as 'care-handling')),
-  );
-
   /** What a variation changes, as the papers call it. */
   protected readonly varies = computed(() =>
     (this.store.issue()?.varies ?? []).map((one) => this.words.say('paper-varies-one', { ...one })).join('; '),
   );
-  protected readonly takenAway = computed(() => {
-    const { gross_minor } = this.store.price() ?? { gross_minor: 0 };
-    return gross_minor < 0 ? this.words.say('paper-takes-away', { amount: this.formats.money(-gross_minor) }) : '';
-  });
-
-  /** The dates of the programme, which was planned for the base alone. */
-  protected readonly dates = computed(() => {
-    const programme = this.store.issue()?.programme;
-    if (!programme || this.store.choice().length > 0) return '';
-    const [starts, finishes, offered] = [programme.startsOn, programme.finishesOn, programme.offeredOn].map((day) =>
-      this.formats.day(day),
-    );
-    return this.words.say('paper-programme-dates', { starts, finishes, offered, days: programme.workingDays });
-  });
   protected readonly underSum = computed(() => {
-    const programme = this.store.issue()?.programme;
-    if (!programme || this.dates() === '') return $localize`tax included`;
+    const programme = this.store.programme();
+    if (!programme) return $localize`tax included`;
     return $localize`tax included, ready by ${this.formats.day(programme.offeredOn, 'short')}:day:`;
   });
 

@@ -29,6 +29,12 @@ export class ClientIssueStore {
   });
   readonly choice = this.chosen.asReadonly();
 
+  /** How many parts below the head are shown. */
+  readonly shown = signal(1);
+
+  /** The dates of the programme, which was planned for the base alone. */
+  readonly programme = computed(() => (this.choice().length > 0 ? null : (this.issue()?.programme ?? null)));
+
   private readonly pricing = resource({
     params: () => {
       const issue = this.issue();
