@@ -32,6 +32,8 @@ const onDatabase = (name) => ({
 
 module.exports = {
   maxWorkers: 2,
+  /** What test files leave behind fills a worker, and then it mostly sweeps: a fresh one takes the next file sooner. */
+  workerIdleMemoryLimit: '1GB',
   /** A busy machine makes a test slow, not wrong. */
   testTimeout: 60_000,
   projects: [

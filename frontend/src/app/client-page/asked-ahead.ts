@@ -1,6 +1,6 @@
 import type { ClientOverview } from '#shared/client-page/client-overview-schema';
 import type { ClientIssue } from '#shared/client-page/client-issue-schema';
-import { writeIssueHead, writePapersHead } from './opening-head';
+import { writeOpeningHead, writePapersHead } from './opening-head';
 
 /** What came of a request, as far as a call reads it. */
 export interface Answer {
@@ -40,7 +40,7 @@ export class AskedAhead {
   constructor(
     private readonly ask: typeof fetch = (address, request) => fetch(address, request),
     private readonly show: Show = {
-      issue: (issue) => writeIssueHead(document, issue),
+      issue: (issue) => writeOpeningHead(document, issue),
       papers: (papers) => writePapersHead(document, papers),
     },
   ) {}

@@ -2,7 +2,7 @@ import { TestBed } from '@angular/core/testing';
 import { readFileSync } from 'node:fs';
 import { clientIssue } from '../../test/client-issue';
 import { ClientFrame } from './client-frame';
-import { uncover, writeIssueHead, writePapersHead } from './opening-head';
+import { uncover, writeOpeningHead, writePapersHead } from './opening-head';
 
 const [cover] = /<div class="opening">[\s\S]*<\/div>/.exec(readFileSync('frontend/src/client.html', 'utf8')) ?? [''];
 const text = (part: string) => document.querySelector(`[data-part=${part}]`)?.textContent;
@@ -17,13 +17,13 @@ describe('The head over the page that is being opened', () => {
 
   it('says whose paper it is, what it is called, for whom, and its introduction, as plain text', () => {
     const issue = clientIssue({ introduction: 'Carved in <b>lime</b>.' });
-    writeIssueHead(document, issue);
+    writeOpeningHead(document, issue);
     expect(shown()).toEqual(['Mill Yard Carvers', 'Pier table', 'Helena Marsh', 'Carved in <b>lime</b>.']);
   });
 
   it('says whose papers all of them are, and nothing of that over a single one', () => {
     const { letterhead } = clientIssue();
-    writeIssueHead(document, clientIssue());
+    writeOpeningHead(document, clientIssue());
     expect(list()?.hidden).toBe(true);
     writePapersHead(document, { letterhead, client: { name: 'Helena <i>Marsh</i>' }, jobs: [], invoices: [] });
     expect([list()?.hidden, list()?.textContent, text('name')]).toEqual([
@@ -33,7 +33,7 @@ describe('The head over the page that is being opened', () => {
 
   it('leaves the introduction to the application where an answer stands before it', () => {
     const issue = clientIssue({ introduction: 'Carved in lime.' });
-    writeIssueHead(document, { ...issue, issue: { ...issue.issue, state: 'accepted' } });
+    writeOpeningHead(document, { ...issue, issue: { ...issue.issue, state: 'accepted' } });
     expect(shown().at(-1)).toBe('');
   });
 
@@ -44,6 +44,6 @@ describe('The head over the page that is being opened', () => {
     fixture.componentRef.setInput('letterhead', clientIssue().letterhead);
     TestBed.tick();
     expect(document.querySelector('.opening')).toBeNull();
-    expect(() => writeIssueHead(document, clientIssue())).not.toThrow();
+    expect(() => writeOpeningHead(document, clientIssue())).not.toThrow();
   });
 });

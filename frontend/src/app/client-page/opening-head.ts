@@ -11,7 +11,7 @@ function write(document: Document, texts: Readonly<Record<string, string>>): voi
 }
 
 /** Writes the head of a paper over the page that is being opened: it can be read while the application is still on its way. */
-export function writeIssueHead(
+export function writeOpeningHead(
   document: Document,
   { letterhead, issue, job, addressee, introduction }: ClientIssue,
 ): void {

@@ -109,7 +109,7 @@ describe('JobInvoices', () => {
     const claim = { of: 'work', from_percent: '0', to_percent: '100' } as const;
     const next = { claim, name: '', plannedOn: null, net_minor: -350_00, gross_minor: -420_00 };
     const visit = await shown({ kind: 'variation', gross_minor: -420_00, next: [next] });
-    expect(visit.text).toContain('-€420.00');
+    expect(visit.text).toContain('−€420.00');
     expect(visit.button('Invoice by the share that is done')).toBeUndefined();
     await visit.press('Draft the credit note, Taken away, to be credited');
     expect(visit.request('POST', stage).request.body).toMatchObject({ issueId, claim });
