@@ -56,13 +56,16 @@ import type { Visitor } from './visitor';
 /** What is promised about programmes: kept and refused in words, planned on the server, around other work, at the bench, in calendars. */
 let api: Api;
 let owner: Visitor;
-beforeEach(async () => {
+beforeAll(async () => {
   api = await startApi();
-  owner = api.as('owner');
-  // Planned twice is planned from the same minute.
-  api.clock.stand();
 }, 60_000);
-afterEach(() => api.stop());
+beforeEach(async () => {
+  // Planned twice is planned from the same minute.
+  api.clock.stand(new Date());
+  await api.another();
+  owner = api.as('owner');
+});
+afterAll(() => api.stop());
 
 const at = (estimateId: string) => ({ params: { estimateId } });
 const instant = (answer: ProgrammeAnswer, minutes: number) => Date.parse(answer.startsAt) + minutes * 60_000;
@@ -492,7 +495,7 @@ describe('The bench', () => {
     const day = new Date(instant(programme, task.start_minutes)).toISOString().slice(0, 10);
     const answer = await bench.call(readBenchDay, { query: { day } });
     const read = answer.body as BenchDay;
-    expect(read.person?.name).toBe('Herons first hand');
+    expect(read.person?.name).toBe(`${api.ours.mark} first hand`);
     expect(read.people).toHaveLength(1);
     expect(read.tasks.map(({ startsAt }) => startsAt)).toEqual(read.tasks.map(({ startsAt }) => startsAt).sort());
     expect(read.tasks[0]).toMatchObject({ taskId: task.taskId, state: 'ready', kind: 'carving' });
@@ -525,7 +528,7 @@ describe('The bench', () => {
       tasks: [],
     });
     expect((await owner.call(readBenchDay, { query: { personId: content.people[1].id } })).body.person.name).toBe(
-      'Herons second hand',
+      `${api.ours.mark} second hand`,
     );
     expect((await owner.call(readBenchDay, { query: { personId: newId() } })).status).toBe(404);
   });

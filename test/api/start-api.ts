@@ -30,11 +30,13 @@ export interface Api {
   readonly clock: MovingClock;
   /** What stands in for the payment service. */
   readonly standIn: StandInPayments;
-  readonly ours: TestWorkshop;
+  ours: TestWorkshop;
   /** Another workshop, whose every text carries the canary. */
   readonly theirs: TestWorkshop;
   /** What was logged, a line each. */
   readonly logLines: string[];
+  /** Ours is from now on a workshop in which nothing was done yet: sooner there than another server on another database. */
+  another(): Promise<void>;
   /** Somebody of our workshop, signed in. */
   as(role: Role): Visitor;
   /** Somebody new in a workshop, signed in, for tests that change who they are. */
@@ -107,19 +109,26 @@ const openWorkshops = async (door: Door) => ({
 export async function startApi(environment: Environment = {}, headers: Environment = {}): Promise<Api> {
   const { catcher, ...parts } = await openParts(environment);
   const { app, platform } = parts;
-  const workshops = await openWorkshops({ app, platform, headers }).catch(async (error: unknown) => {
+  const door = { app, platform, headers };
+  const workshops = await openWorkshops(door).catch(async (error: unknown) => {
     await parts.stop();
     throw error;
   });
-  return {
+  let opened = 1;
+  const api: Api = {
     ...parts,
     ...workshops,
-    as: (role) => workshops.ours.people[role].visitor,
-    newcomer: (workshop, role) => addPerson({ app, platform, headers }, { workshop, role }),
+    another: async () => {
+      opened += 1;
+      api.ours = await openWorkshop(door, `Herons-${opened}`);
+    },
+    as: (role) => api.ours.people[role].visitor,
+    newcomer: (workshop, role) => addPerson(door, { workshop, role }),
     stranger: (own) => new Visitor(app.web.express, own ?? headers).arrive(),
     mails: async () => {
       await platform.tasks.runDue();
       return catcher.mails();
     },
   };
+  return api;
 }
