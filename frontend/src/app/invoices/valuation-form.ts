@@ -51,7 +51,7 @@ export class ValuationForm {
   });
   protected readonly hint = computed(
     () =>
-      $localize`Of the whole of it. Invoiced up to ${this.formats.number(Number(this.from_percent()), 6)}:done: % so far.`,
+      $localize`Of the whole of it. Invoiced up to ${this.formats.percent(Number(this.from_percent()), 6)}:done: so far.`,
   );
   protected readonly isFurther = computed(
     () => Number(this.form.parsed()?.to_percent ?? Number.NaN) > Number(this.from_percent()),

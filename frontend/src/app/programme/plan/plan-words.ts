@@ -127,7 +127,7 @@ export class PlanWords {
 
   private proof({ status, gap }: Programme): string {
     if (status === 'optimal' || gap === 0) return $localize`no plan is sooner`;
-    return $localize`at most ${this.formats.number((gap ?? 0) * 100, 0)}:percent: % from the soonest possible`;
+    return $localize`at most ${this.formats.percent((gap ?? 0) * 100, 0)}:percent: from the soonest possible`;
   }
 
   /** Grades by their names. */
