@@ -43,11 +43,11 @@ function durationWriter({ worded }: Pen): Write {
   };
 }
 
-/** An area with as many decimals as its unit takes everywhere, so that figures under each other align; nothing is a plain nought. */
+/** An area with as many decimals as its unit takes everywhere, so that figures under each other align; what rounds to nothing is a plain nought. */
 const areaIn =
   ({ worded }: Pen, code: WordCode) =>
   (size: number, digits: number): string =>
-    worded(code, size, size === 0 ? 0 : { exactly: digits });
+    worded(code, size, Number(size.toFixed(digits)) === 0 ? 0 : { exactly: digits });
 
 const metricArea = (pen: Pen): Write => {
   const [small, large] = [areaIn(pen, 'unit-square-centimetres'), areaIn(pen, 'unit-square-metres')];

@@ -63,7 +63,7 @@ describe('CalendarFeeds', () => {
     await open();
     const items = [...element().querySelectorAll('.feeds li')].map((one) => spoken(one));
     expect(items).toHaveLength(1);
-    expect(items[0]).toMatch(/^Office wall the whole workshop · made by Ora on .+ · not read yet Take it back$/);
+    expect(items[0]).toMatch(/^Office wall ?the whole workshop · made by Ora on .+ · not read yet ?Take it back$/);
   });
 
   it('makes one, shows its address once, and copies it', async () => {
