@@ -24,6 +24,15 @@ afterAll(async () => {
   await rm(folder, { recursive: true, force: true });
 }, 30_000);
 
+/** What a process was started as; nothing where it has ended, though nobody may have taken note of that yet. */
+function commandOf(pid: number): string {
+  try {
+    return readFileSync(`/proc/${pid}/cmdline`, 'utf8');
+  } catch {
+    return '';
+  }
+}
+
 const freePort = (): Promise<number> =>
   new Promise((resolve) => {
     const probe = createServer().listen(0, '127.0.0.1', () => {
@@ -156,10 +165,11 @@ describe('the first start', () => {
         await untilReady(first);
       }
       const pid = Number(readFileSync(join(folder, 'data/database.pid'), 'utf8'));
+      expect(commandOf(pid)).toContain('mariadbd');
       first.child.kill(signal);
       expect(await first.ended).toBe(0);
       expect(await status('/healthz')).toBe(0);
-      expect(() => process.kill(pid, 0)).toThrow();
+      expect(commandOf(pid)).toBe('');
       expect(existsSync(join(folder, 'data/start.pid'))).toBe(false);
     },
     60_000,
