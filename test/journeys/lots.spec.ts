@@ -2,6 +2,7 @@ import { v7 as newId } from 'uuid';
 import type { Change } from '#shared/estimates/change-schema';
 import { changeEstimate } from '#shared/estimates/estimates-endpoints';
 import { sampleEstimate, sampleMember, type SampleEstimate } from '../api/sample-estimate';
+import { expectInTime } from './expect-in-time';
 import { Walk } from './walk';
 
 /** What is coated together is said on Dry, and takes effect there. */
@@ -43,7 +44,8 @@ it('coats a member on its own by the keyboard alone, names its lot, and undoes i
   await lots.getByRole('gridcell', { name: /^Feet, assembled: Water gilding/ }).waitFor();
   await page.getByText(/^kept/).waitFor();
   await see('journey lots');
-  expect(await kept(sample)).toEqual(['', 'Feet, assembled']);
+  // It is sent a moment after the last key.
+  await expectInTime(() => kept(sample), ['', 'Feet, assembled']);
   await page.getByRole('heading', { name: 'Coated together' }).click();
   await page.keyboard.press('Control+z');
   await page.keyboard.press('Control+z');
@@ -51,8 +53,6 @@ it('coats a member on its own by the keyboard alone, names its lot, and undoes i
     .getByRole('gridcell', { name: /Feet, assembled/ })
     .first()
     .waitFor({ state: 'detached' });
-  // It is sent a moment after the last key.
-  for (let tries = 0; tries < 100 && (await kept(sample)).at(1) !== ''; tries += 1) await page.waitForTimeout(100);
-  expect(await kept(sample)).toEqual(['', '']);
+  await expectInTime(() => kept(sample), ['', '']);
   expect(complaints).toEqual([]);
 }, 120_000);

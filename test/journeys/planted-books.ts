@@ -164,7 +164,10 @@ export class PlantedBooks {
     const { version, inputs, request } = await programmeOf(ours, sample.estimateId);
     const lot = { lotId: 'x', portions: null, crew: null, mostPeople: null, places: null };
     const at = `${addDays(inputs.day, 1)}T09:00:00.000Z`;
-    const more = { lots: [lot], pins: [{ taskId: 'x', at }], approvals: [{ approvalId: 'x', at }] };
+    const more = {
+      ...{ lots: [lot], pins: [{ taskId: 'x', at }], approvals: [{ approvalId: 'x', at }] },
+      hands: [{ workId: 'x', crew: 1 }],
+    };
     await this.send(keepProgramme, { params, version, body: { ...inputs, ...more } });
     const plan = { ...solved(request), cycle: [wordsOfAPlan] };
     await done(walk, keepPlan, { params, version: version + 1, body: plan });

@@ -46,7 +46,7 @@ afterAll(() => walk.end());
 const knownByARule =
   /\.(email|website|currency|locale|timeZone|password|token|current|vatId|iban|bic|reasonCode)$|^(markTask\.taskId|readWhatIf\.lots\.\*\.lotId|keepPlan\..*)$/;
 /** The browser makes these to tell the elements of a profile apart, or names steps of a programme by them; nobody reads them. */
-const shownNowhere = /\.(profile\.\*\.id|take\.parts\.\*|lotId|taskId|approvalId)$/;
+const shownNowhere = /\.(profile\.\*\.id|take\.parts\.\*|lotId|taskId|workId|approvalId)$/;
 
 /** What no page of ours makes: had a text become markup, one of these would stand there. */
 const marks =
