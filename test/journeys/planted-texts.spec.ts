@@ -102,7 +102,7 @@ async function lookAtAll({ page }: Person, pages: typeof memberPages): Promise<v
 test('every page shows them as text', async () => {
   await lookAtAll(scene.person, memberPages);
   expect(faults).toEqual([]);
-}, 300_000);
+}, 500_000);
 
 test('every further line that is opened shows them as text', async () => {
   const { page } = scene.person;
