@@ -1,5 +1,6 @@
 import { buyerOf } from '#shared/invoices/buyer-of';
-import { exchangeCountry, isOfCountry } from '#shared/invoices/exchange-country';
+import { exchangeCountry, isVatNumber } from '#shared/invoices/exchange-country';
+import { startInvoiceSettings } from '#shared/invoices/invoice-settings';
 
 it.each([
   ['IE', 'IE'],
@@ -20,7 +21,7 @@ it.each([
   ['AB51824753556', false],
   ['', false],
 ])('a VAT number %s begins with a country: %s', (vatId, isRight) => {
-  expect(isOfCountry(vatId)).toBe(isRight);
+  expect(isVatNumber(vatId)).toBe(isRight);
 });
 
 it('takes a registration for a VAT number where it begins with a country, else for another number', () => {
@@ -31,4 +32,7 @@ it('takes a registration for a VAT number where it begins with a country, else f
   };
   expect(numbers('DE 123 456 789')).toEqual(['DE123456789', '']);
   expect(numbers('ABN 51 824 753 556')).toEqual(['', 'ABN 51 824 753 556']);
+  const seller = (taxRegistration: string) => startInvoiceSettings({ name: 'Quay', taxRegistration }).seller;
+  expect(seller('IE 1234567 T')).toMatchObject({ vatId: 'IE1234567T', taxNumber: '' });
+  expect(seller('ABN 51 824 753 556')).toMatchObject({ vatId: '', taxNumber: 'ABN 51 824 753 556' });
 });

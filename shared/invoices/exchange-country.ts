@@ -22,5 +22,6 @@ export function exchangeCountry(code: string): string | undefined {
   return known.has(written) ? written : undefined;
 }
 
-/** Whether a VAT number begins with the letters of a country (BR-CO-09): Greece writes EL. */
-export const isOfCountry = (vatId: string): boolean => vatId.startsWith('EL') || known.has(vatId.slice(0, 2));
+/** Whether a text is the number of a VAT registration as invoices write it: the letters of its country before it (EN 16931, BR-CO-09), of Greece EL. */
+export const isVatNumber = (text: string): boolean =>
+  /^[A-Z]{2}[0-9A-Z+*.]{2,18}$/.test(text) && (text.startsWith('EL') || known.has(text.slice(0, 2)));

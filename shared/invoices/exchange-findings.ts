@@ -1,4 +1,4 @@
-import { exchangeCountry, isOfCountry } from '#shared/invoices/exchange-country';
+import { exchangeCountry, isVatNumber } from '#shared/invoices/exchange-country';
 import { isExchangeCurrency } from '#shared/invoices/exchange-currency';
 import { when, type InvoiceInHand } from '#shared/invoices/invoice-in-hand';
 import type { Finding } from '#shared/words/finding';
@@ -6,7 +6,7 @@ import type { Finding } from '#shared/words/finding';
 /** Countries, and the letters VAT numbers begin with, are those of the lists (EN 16931: BR-CL-14, BR-CO-09). */
 function countryFindings({ content: { buyer }, country, seller }: InvoiceInHand): Finding[] {
   const unknown = [country, buyer.country].find((code) => exchangeCountry(code) === undefined);
-  const isForeignForm = [seller.vatId, buyer.vatId].some((vatId) => vatId !== '' && !isOfCountry(vatId));
+  const isForeignForm = [seller.vatId, buyer.vatId].some((vatId) => vatId !== '' && !isVatNumber(vatId));
   return [
     ...when(unknown !== undefined, ['refuse', 'invoice-country-unknown'], { country: unknown ?? '' }),
     ...when(isForeignForm, ['refuse', 'invoice-vat-form']),

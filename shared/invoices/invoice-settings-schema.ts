@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { isVatNumber } from '#shared/invoices/exchange-country';
 import type { InvoiceSettings } from '#shared/invoices/invoice-settings';
 import { isIban } from '#shared/invoices/is-iban';
 import { complain } from '#shared/problems/complaints-of';
@@ -16,10 +17,7 @@ const bic = compact.refine(
 );
 
 /** The number of a VAT registration with the two letters of its country, or nothing (EN 16931, BR-CO-09). */
-export const vatId = compact.refine(
-  (text) => text === '' || /^[A-Z]{2}[0-9A-Z+*.]{2,18}$/.test(text),
-  complain('invoice-vat-form'),
-);
+export const vatId = compact.refine((text) => text === '' || isVatNumber(text), complain('invoice-vat-form'));
 
 const prefix = z
   .string()

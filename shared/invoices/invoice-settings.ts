@@ -1,3 +1,4 @@
+import { isVatNumber } from '#shared/invoices/exchange-country';
 import type { InvoiceSeller, PayeeAccount } from '#shared/invoices/invoice';
 
 /** How a workshop invoices: who it says it is, where money goes, when it falls due, and how its numbers begin. */
@@ -17,7 +18,7 @@ export interface InvoiceSettings {
 /** What a workshop invoices with until somebody says otherwise: its tax registration is taken for what it looks like. */
 export function startInvoiceSettings(workshop: { name: string; taxRegistration: string }): InvoiceSettings {
   const registration = workshop.taxRegistration.replace(/\s/g, '');
-  const isVatId = /^[A-Z]{2}[0-9A-Z]{2,}$/.test(registration);
+  const isVatId = isVatNumber(registration);
   return {
     seller: {
       vatId: isVatId ? registration : '',

@@ -139,16 +139,11 @@ export class LedgerService {
     const shares = await this.parts.payments.sharesOf(workshopId, ids);
     const invoiceIds = [...new Set(shares.map(({ invoiceId }) => invoiceId))];
     const invoices = await this.parts.invoices.named(workshopId, invoiceIds);
-    const held = (paymentId: string, invoiceId: string) =>
-      sumMinor(
-        shares
-          .filter((one) => one.paymentId === paymentId && one.invoiceId === invoiceId)
-          .map((one) => one.amountMinor),
-      );
-    const own = groupedBy(shares, ({ paymentId }) => paymentId);
+    const ofPayment = groupedBy(shares, ({ paymentId }) => paymentId);
     const numbersOf = (id: string) => {
-      const paidIds = new Set((own.get(id) ?? []).map(({ invoiceId }) => invoiceId));
-      return invoices.filter((row) => paidIds.has(row.id) && held(id, row.id) > 0).map(({ number }) => number ?? '');
+      const ofInvoice = groupedBy(ofPayment.get(id) ?? [], ({ invoiceId }) => invoiceId);
+      const paid = (row: { id: string }) => sumMinor((ofInvoice.get(row.id) ?? []).map((one) => one.amountMinor)) > 0;
+      return invoices.filter(paid).map(({ number }) => number ?? '');
     };
     const numbers = new Map(ids.map((id) => [id, numbersOf(id)]));
     const ways = new Map(payments.map(({ id, way }) => [id, way]));

@@ -31,7 +31,8 @@ export const invoices = {
   'invoice-too-large': 'These amounts are larger than can be counted exactly.',
   'invoice-period-turned': 'The period ends before it begins.',
   'invoice-account-wrong': 'This IBAN does not add up. Please compare it with the bank’s.',
-  'invoice-vat-form': 'A VAT number begins with the two letters of its country.',
+  'invoice-vat-form':
+    'A VAT number begins with the two letters of its country. One of another kind is a tax number or a company number.',
   'invoice-country-unknown': 'No country has the letters {country}. Please choose one from the list.',
 
   // Drafts

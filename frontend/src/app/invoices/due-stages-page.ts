@@ -1,16 +1,14 @@
-import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { MatButton } from '@angular/material/button';
-import { Router, RouterLink } from '@angular/router';
+import { RouterLink } from '@angular/router';
 import type { DueStage } from '#shared/invoices/due-stages-endpoints';
 import { Formats } from '../core/formats/formats';
 import { PagedList } from '../core/lists/paged-list';
-import { newId } from '../core/new-id';
-import { Notices } from '../core/problems/notices';
-import { ProblemError } from '../core/problems/problem-error';
 import { ListBody } from '../jobs';
 import { EmptyState } from '../ui/page/empty-state';
 import { claimName } from './claim-names';
 import { InvoiceCalls } from './invoice-calls';
+import { StageDrafting } from './stage-drafting';
 import { workshopToday } from './workshop-today';
 
 /** What can be invoiced across all jobs: what has a day by its day, then what waits for a milestone or for its share of the work. */
@@ -18,17 +16,17 @@ import { workshopToday } from './workshop-today';
   selector: 'app-due-stages-page',
   imports: [EmptyState, ListBody, MatButton, RouterLink],
   changeDetection: ChangeDetectionStrategy.OnPush,
+  providers: [StageDrafting],
   templateUrl: './due-stages-page.html',
   styleUrl: './due-stages-page.scss',
 })
 export class DueStagesPage {
   private readonly calls = inject(InvoiceCalls);
-  private readonly router = inject(Router);
-  private readonly notices = inject(Notices);
+  private readonly drafting = inject(StageDrafting);
   protected readonly formats = inject(Formats);
   private readonly today = workshopToday();
 
-  protected readonly isBusy = signal(false);
+  protected readonly isBusy = this.drafting.isBusy;
   private readonly asked = computed(() => ({}));
   protected readonly list = new PagedList<object, DueStage>(this.asked, (_, cursor, signal) =>
     this.calls.dueStages(cursor, signal),
@@ -36,29 +34,13 @@ export class DueStagesPage {
   protected readonly rows = computed(() =>
     this.list.items().map((stage) => ({ stage, name: claimName(stage, this.formats), when: this.whenOf(stage) })),
   );
-  /** Made once for each claim: a second press drafts nothing twice. */
-  private readonly ids = new Map<string, string>();
 
   protected isPast({ dueOn }: DueStage): boolean {
     return dueOn !== null && dueOn <= this.today();
   }
 
-  protected async draft({ jobId, issueId, claim }: DueStage): Promise<void> {
-    if (this.isBusy()) return;
-    this.isBusy.set(true);
-    const key = JSON.stringify([issueId, claim]);
-    const invoiceId = this.ids.get(key) ?? newId();
-    this.ids.set(key, invoiceId);
-    try {
-      await this.calls.beginStage(jobId, { invoiceId, issueId, claim });
-      await this.router.navigate(['/accounts/invoices', invoiceId]);
-    } catch (error) {
-      if (!(error instanceof ProblemError)) throw error;
-      this.notices.complain(error.message);
-      this.list.reload();
-    } finally {
-      this.isBusy.set(false);
-    }
+  protected async draft(stage: DueStage): Promise<void> {
+    if (!(await this.drafting.draft(stage))) this.list.reload();
   }
 
   private whenOf(stage: DueStage): string {

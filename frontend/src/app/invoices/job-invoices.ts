@@ -1,17 +1,17 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, resource, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
-import { Router, RouterLink } from '@angular/router';
+import { RouterLink } from '@angular/router';
 import type { ContractAccountAnswer } from '#shared/invoices/contract-account-endpoints';
 import type { StageClaim } from '#shared/invoices/stage-claim';
 import type { Job } from '#shared/jobs/job-schema';
 import { Formats } from '../core/formats/formats';
-import { newId } from '../core/new-id';
 import { Notices } from '../core/problems/notices';
 import { ProblemError } from '../core/problems/problem-error';
 import { Session } from '../core/session/session';
 import { claimName } from './claim-names';
 import { InvoiceCalls } from './invoice-calls';
 import { invoiceKindNames } from './invoice-names';
+import { StageDrafting } from './stage-drafting';
 import { StandingMark } from './standing-mark';
 import { ValuationForm } from './valuation-form';
 
@@ -22,12 +22,13 @@ type Part = ContractAccountAnswer['parts'][number];
   selector: 'app-job-invoices',
   imports: [MatButton, RouterLink, StandingMark, ValuationForm],
   changeDetection: ChangeDetectionStrategy.OnPush,
+  providers: [StageDrafting],
   templateUrl: './job-invoices.html',
   styleUrl: './job-invoices.scss',
 })
 export class JobInvoices {
   private readonly calls = inject(InvoiceCalls);
-  private readonly router = inject(Router);
+  private readonly drafting = inject(StageDrafting);
   private readonly notices = inject(Notices);
   private readonly session = inject(Session);
   protected readonly formats = inject(Formats);
@@ -54,12 +55,10 @@ export class JobInvoices {
     () => this.contractReading.error()?.message ?? this.listReading.error()?.message ?? '',
   );
   protected readonly mayDraft = computed(() => this.session.may('owner', 'office'));
-  protected readonly isBusy = signal(false);
+  protected readonly isBusy = this.drafting.isBusy;
   /** The part of which a share done is being entered. */
   protected readonly valued = signal<string | undefined>(undefined);
   protected readonly kindNames = invoiceKindNames;
-  /** Made once for each claim: a second press drafts nothing twice. */
-  private readonly ids = new Map<string, string>();
 
   protected readonly parts = computed(() =>
     (this.contract()?.parts ?? []).map((part) => ({
@@ -77,36 +76,19 @@ export class JobInvoices {
     return Math.max(0, Math.min(100, Math.round((standing_minor / contract.gross_minor) * 100)));
   });
 
-  protected async draft(part: Pick<Part, 'issueId'>, claim: StageClaim): Promise<void> {
-    if (this.isBusy()) return;
-    this.isBusy.set(true);
-    const { issueId } = part;
-    const key = JSON.stringify([issueId, claim]);
-    const invoiceId = this.ids.get(key) ?? newId();
-    this.ids.set(key, invoiceId);
-    try {
-      await this.calls.beginStage(this.job().id, { invoiceId, issueId, claim });
-      await this.router.navigate(['/accounts/invoices', invoiceId]);
-    } catch (error) {
-      this.complain(error);
-      this.contractReading.reload();
-      this.listReading.reload();
-    } finally {
-      this.isBusy.set(false);
-    }
+  protected async draft({ issueId }: Pick<Part, 'issueId'>, claim: StageClaim): Promise<void> {
+    if (await this.drafting.draft({ jobId: this.job().id, issueId, claim })) return;
+    this.contractReading.reload();
+    this.listReading.reload();
   }
 
   protected async plan({ issueId }: Pick<Part, 'issueId'>, claim: StageClaim, day: string): Promise<void> {
     try {
       await this.calls.planStage(this.job().id, { issueId, claim, plannedOn: day === '' ? null : day });
     } catch (error) {
-      this.complain(error);
+      if (!(error instanceof ProblemError)) throw error;
+      this.notices.complain(error.message);
     }
     this.contractReading.reload();
-  }
-
-  private complain(error: unknown): void {
-    if (!(error instanceof ProblemError)) throw error;
-    this.notices.complain(error.message);
   }
 }
