@@ -42,8 +42,13 @@ import type { TaskWork } from './task-work';
       display: flex;
       flex-wrap: wrap;
       gap: 4px 12px;
-      align-items: flex-end;
+      align-items: flex-start;
       margin-top: 8px;
+    }
+
+    // In line with the entry, whose name stands above it.
+    button {
+      margin-top: 28px;
     }
 
     app-number-field {
