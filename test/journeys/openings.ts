@@ -92,7 +92,11 @@ const endedSession: Opening = async (scene) => {
   const cookies = await scene.person.context.cookies();
   await scene.person.context.clearCookies();
   await typeOtherCount(page);
-  return () => scene.person.context.addCookies(cookies);
+  return async () => {
+    // The page has begun a session without a name meanwhile: with the old cookie and the new token it would be refused.
+    await page.goto('about:blank');
+    await scene.person.context.addCookies(cookies);
+  };
 };
 
 /** How each of them is reached. */

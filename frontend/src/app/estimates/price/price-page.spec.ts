@@ -327,7 +327,9 @@ describe('PricePage', () => {
       await settle(700);
       // The second is not whole yet: what was reckoned stays, and nothing is shown for the whole.
       expect(server.settings.extras[0]).toMatchObject({ quantity: '0.569' });
-      expect(spoken(element().querySelector('app-measured-quantity'))).toContain('Enter what was measured');
+      expect(spoken(element().querySelector('app-measured-quantity'))).toContain(
+        'until it is, the quantity kept before stands',
+      );
       const second = [...element().querySelectorAll<HTMLInputElement>('app-measured-quantity tr[data-row="1"] input')];
       expect(second.map(({ value }) => value)).toEqual(['1', '', '76.2']);
       for (const [place, text] of [
