@@ -14,6 +14,7 @@ import type { CardColumn, CardList as CardListTable } from '#shared/rate-cards/t
 import { fieldsOf, listCellPath, type CellPath } from '#shared/rate-cards/tables/cell-path';
 import { listRows, type ListRow } from '#shared/rate-cards/tables/list-rows';
 import { valueAt } from '#shared/rate-cards/tables/value-at';
+import { Formats } from '../../core/formats/formats';
 import { Words } from '../../core/formats/words';
 import { FormComplaint } from '../../ui/field/form-complaint';
 import { FigureTable } from '../../ui/table/figure-table';
@@ -46,6 +47,7 @@ const keyOf = ({ path, ids }: ListRow, { hasIds }: CardListTable): string =>
 export class CardList {
   private readonly store = inject(CardStore);
   private readonly words = inject(Words);
+  private readonly formats = inject(Formats);
   private readonly tableColumns = inject(TableColumns);
   private readonly entries = inject(TableEntries);
 
@@ -120,7 +122,7 @@ export class CardList {
 
   protected add(): void {
     const content = this.store.content();
-    const row = content && newRow(this.table().id, content);
+    const row = content && this.begun(content);
     if (row) this.put(row, (this.chosen()?.at ?? this.rows().length - 1) + 1);
   }
 
@@ -144,6 +146,10 @@ export class CardList {
     this.chosenId.set(this.table().hasIds ? id : this.rows()[at + by]?.id);
   }
 
+  private begun(content: RateCard): object | undefined {
+    return newRow(this.table().id, content, this.formats.lengthUnit());
+  }
+
   private put(row: object, at: number): void {
     const content = this.store.content();
     if (!content) return;
@@ -154,7 +160,7 @@ export class CardList {
 
   /** A row for what is pasted below the last one. */
   private grown(content: RateCard, at: number) {
-    const row = newRow(this.table().id, content);
+    const row = this.begun(content);
     if (!row) return undefined;
     const path = [...this.list(), at];
     return { content: withRow(content, this.list(), { at, row }), row: this.tableRow({ path, ids: [] }, undefined) };

@@ -5,6 +5,7 @@ import { cardTables } from '#shared/rate-cards/tables/card-parts';
 import type { CardList } from '#shared/rate-cards/tables/card-table';
 import { listRows } from '#shared/rate-cards/tables/list-rows';
 import { valueAt } from '#shared/rate-cards/tables/value-at';
+import { lengthFigure } from '#shared/units/format-length';
 import { copiedRow, newRow } from './new-row';
 import { withRow } from './with-rows';
 
@@ -24,6 +25,20 @@ describe('A new row', () => {
     const row = newRow(id, startCard);
     const parsed = rateCardSchema.safeParse(withRow(startCard, listOf(table), { at, row }));
     expect(parsed.success ? [] : parsed.error.issues).toEqual([]);
+  });
+});
+
+describe('A new row with a length', () => {
+  it.each([
+    ['leaf', 'side_mm', { mm: '80', in: '3 3/8' }],
+    ['ornaments', 'reference_mm', { mm: '100', in: '4' }],
+  ] as const)('of the list %s is offered in round figures of either unit', (id, field, expected) => {
+    const offered = (unit: 'mm' | 'in') => {
+      const row = newRow(id, startCard, unit) as Record<string, number>;
+      return lengthFigure(row[field], unit, 'en');
+    };
+    expect(offered('mm')).toMatchObject({ figure: expected.mm, isExact: true });
+    expect(offered('in')).toMatchObject({ figure: expected.in, isExact: true });
   });
 });
 

@@ -7,6 +7,7 @@ import type { HumidityPoint } from '#shared/drying/drying-card';
 import type { LeafBreak, LeafProduct } from '#shared/leaf/leaf-product';
 import type { Grade, PaymentStage, TaxCategory, TimberPrice } from '#shared/rate-cards/money-card';
 import type { RateCard } from '#shared/rate-cards/rate-card';
+import type { LengthUnit } from '#shared/units/length-unit';
 import { newId } from '../../core/new-id';
 
 const noHours = { low: 0, likely: 0, high: 0 } as const;
@@ -50,14 +51,19 @@ const newBuildUp = (card: RateCard): BuildUp => ({
   note: '',
 });
 
-const newLeaf = (): LeafProduct => ({
+/** The usual side of a leaf of gold: 80 mm, and 3 3/8 in where leaf is beaten to inches. */
+const leafSide_mm = { mm: 80, in: 85.725 } as const;
+/** A round length of about a hand's breadth. */
+const ornamentSize_mm = { mm: 100, in: 101.6 } as const;
+
+const newLeaf = (_: RateCard, unit: LengthUnit): LeafProduct => ({
   id: newId(),
   name: $localize`New leaf`,
   metal: 'gold',
   form: 'loose',
   carat: null,
   alloy: { gold: 1 },
-  side_mm: 80,
+  side_mm: leafSide_mm[unit],
   ribbon_mm: null,
   leavesPerBooklet: 25,
   price: '1',
@@ -66,11 +72,11 @@ const newLeaf = (): LeafProduct => ({
   thickness_micrometres: null,
 });
 
-const newOrnament = (): Ornament => ({
+const newOrnament = (_: RateCard, unit: LengthUnit): Ornament => ({
   id: newId(),
   name: $localize`New ornament`,
   way: 'piece',
-  reference_mm: 100,
+  reference_mm: ornamentSize_mm[unit],
   relief: 'middle',
   hours: noHours,
   patternHours: noHours,
@@ -102,6 +108,8 @@ const nextPoint = ({ drying: { oilHumidity } }: RateCard): HumidityPoint => {
   const last = oilHumidity.at(-1) ?? { humidity_percent: 0, factor: 1 };
   return { ...last, humidity_percent: Math.min(100, last.humidity_percent + 5) };
 };
+
+type RowMaker = (card: RateCard, unit: LengthUnit) => object;
 
 const makers = {
   grades: (): Grade => ({ id: newId(), name: $localize`New grade`, costPerHour: '0' }),
@@ -140,14 +148,12 @@ const makers = {
     return { way: 'coverage', coverage_m2_L: 10, ...taken };
   },
   lags: (): StepLag => ({ toStepId: '', least_minutes: null, finishedWithin_minutes: null }),
-} satisfies Readonly<Record<string, (card: RateCard) => object>>;
+} satisfies Readonly<Record<string, RowMaker>>;
 
-/** A row to begin with in a list of the card; undefined for a table that is no list. */
-export function newRow(tableId: string, card: RateCard): object | undefined {
-  const maker: ((card: RateCard) => object) | undefined = (makers as Record<string, (card: RateCard) => object>)[
-    tableId
-  ];
-  return maker?.(card);
+/** A row to begin with in a list of the card, its lengths round ones in the workshop's unit; undefined for a table that is no list. */
+export function newRow(tableId: string, card: RateCard, unit: LengthUnit = 'mm'): object | undefined {
+  const maker: RowMaker | undefined = (makers as Record<string, RowMaker>)[tableId];
+  return maker?.(card, unit);
 }
 
 /** A copy of a row, and of all that stands in it, under ids of its own; waits between steps keep to the copied steps. */
