@@ -54,6 +54,23 @@ const sharedRefused = [
   refuse(':matches(NewExpression, CallExpression)[callee.name="Date"][arguments.length=0]', 'The time is an argument.'),
 ];
 
+const asText = 'A text is inserted as text, never as markup.';
+
+const pageRefused = [
+  ...everywhereRefused,
+  refuse('AssignmentExpression > MemberExpression.left[property.name=/^(innerHTML|outerHTML|srcdoc)$/]', asText),
+  refuse(
+    'CallExpression[callee.property.name=/^(insertAdjacentHTML|setHTMLUnsafe|parseHTMLUnsafe|createContextualFragment|parseFromString)$/]',
+    asText,
+  ),
+  refuse('CallExpression[callee.object.name="document"][callee.property.name=/^write(ln)?$/]', asText),
+  refuse('CallExpression[callee.property.name=/^bypassSecurityTrust/]', asText),
+];
+
+const templatesRefused = [
+  refuse(':matches(BoundAttribute, TextAttribute)[name=/^(innerHTML|outerHTML|srcdoc)$/i]', asText),
+];
+
 const specsRefused = [
   ...everywhereRefused,
   refuse('ExpressionStatement > CallExpression[callee.name="expect"]', 'An expectation needs a matcher.'),
@@ -120,6 +137,7 @@ const page = {
   extends: [...angular.configs.tsRecommended],
   processor: angular.processInlineTemplates,
   rules: {
+    ...restrictedSyntax(pageRefused),
     'local/no-endless-subscription': 'error',
     'no-console': ['error', { allow: ['error'] }],
     '@angular-eslint/prefer-on-push-component-change-detection': 'error',
@@ -145,6 +163,7 @@ const templates = {
     '@angular-eslint/template/button-has-type': 'error',
     '@angular-eslint/template/no-inline-styles': ['error', { allowNgStyle: true, allowBindToStyle: true }],
     '@angular-eslint/template/no-any': 'error',
+    ...restrictedSyntax(templatesRefused),
     '@angular-eslint/template/i18n': ['error', { checkId: false, checkDuplicateId: false, checkAttributes: false }],
     'local/spoken-attributes-are-marked': 'error',
   },

@@ -110,6 +110,38 @@ const breaches: readonly Breach[] = [
     text: "export const made: unknown = new Function('return 1');\n",
   },
   {
+    what: 'a text set as markup',
+    rule: 'no-restricted-syntax',
+    at: 'frontend/src/app/jobs/markup.ts',
+    text: 'export const show = (element: HTMLElement, name: string) => {\n  element.innerHTML = name;\n};\n',
+  },
+  {
+    what: 'a text written into the document as markup',
+    rule: 'no-restricted-syntax',
+    at: 'frontend/src/app/jobs/inserted.ts',
+    text: "export const show = (list: HTMLElement, name: string) => list.insertAdjacentHTML('beforeend', name);\n",
+  },
+  {
+    what: 'a text declared harmless',
+    rule: 'no-restricted-syntax',
+    at: 'frontend/src/app/jobs/trusted.ts',
+    text: `import type { DomSanitizer } from '@angular/platform-browser';
+export const trusted = (sanitizer: DomSanitizer, name: string) => sanitizer.bypassSecurityTrustHtml(name);
+`,
+  },
+  {
+    what: 'a text bound as markup',
+    rule: 'no-restricted-syntax',
+    at: 'frontend/src/app/jobs/bound.html',
+    text: '<p [innerHTML]="name"></p>\n',
+  },
+  {
+    what: 'a text bound as markup by its attribute',
+    rule: 'no-restricted-syntax',
+    at: 'frontend/src/app/jobs/bound-attribute.ts',
+    text: component('<iframe title="Paper" i18n-title [attr.srcdoc]="name"></iframe>'),
+  },
+  {
     what: 'a timer given text',
     rule: '@typescript-eslint/no-implied-eval',
     at: 'frontend/src/app/jobs/timed.ts',
