@@ -14,6 +14,7 @@ import type { ProgrammeItem } from '#shared/programme/programme-item';
 import type { PlannedTask } from '#shared/programme/programme-plan';
 import type { ProgrammeLag, ProgrammeRequest, TaskPoint } from '#shared/programme/programme-request';
 import type { PromisedPlan } from '#shared/programme/promised-plan';
+import { unattendedMarks } from '#shared/programme/unattended-marks';
 
 /** A job as the bench works it: its plan in the minutes of the frame, what was asked of it, where its tasks stand. */
 export interface BenchJob extends PromisedPlan {
@@ -48,10 +49,10 @@ interface At {
   readonly frame: ProgrammeFrame;
 }
 
-const knownOf = (job: BenchJob): Known => ({
+const knownOf = (job: BenchJob, frame: ProgrammeFrame): Known => ({
   job,
   planned: new Map(job.plan.tasks.map((task) => [task.taskId, task])),
-  marks: new Map(job.marks.map((mark) => [mark.taskId, mark])),
+  marks: new Map(unattendedMarks({ ...job, frame }).map((mark) => [mark.taskId, mark])),
 });
 
 /** A moment of a task: as marked, else as planned. */
@@ -139,7 +140,7 @@ function benchTask(
 
 /** One task of a job as the bench reads it; null where the plan does not hold it. */
 export function benchTaskOf(job: BenchJob, taskId: string, asked: BenchAsked): BenchTask | null {
-  const known = knownOf(job);
+  const known = knownOf(job, asked.frame);
   const item = job.items.find((one) => one.taskId === taskId);
   const task = known.planned.get(taskId);
   return item && task ? benchTask(item, task, { known, asked }) : null;
@@ -184,7 +185,7 @@ export function benchDayOf(jobs: readonly BenchJob[], asked: BenchAsked): BenchD
   const [from, to] = [minutesOfDay(day, frame), minutesOfDay(addDays(day, 1), frame)];
   const [fromInstant, toInstant] = [instantOf(from, frame), instantOf(to, frame)];
   const all = jobs.flatMap((job) => {
-    const known = knownOf(job);
+    const known = knownOf(job, frame);
     return job.items.flatMap((item) => {
       const task = known.planned.get(item.taskId);
       return task && item.kind !== 'carved' ? [{ planned: task, task: benchTask(item, task, { known, asked }) }] : [];

@@ -264,6 +264,24 @@ describe('What has happened', () => {
     expect(tasks.find(({ id }) => id.endsWith('burnish/1.1'))?.pinned_minutes).toBe(35 * day + 540);
   });
 
+  it('carries the end of a member’s carving with it, from which its approval is waited for and not from today', () => {
+    const carving = programmeFor([panel]).items.filter(({ kind }) => kind === 'carving');
+    const marks = carving.map(({ taskId, gradeId }, at) => ({
+      ...{ taskId, startedAt: '2026-06-01T07:00:00.000Z', left_minutes: 0, personIds: [gradeId] },
+      endedAt: `2026-06-0${String(2 + at)}T09:30:00.000Z`,
+    }));
+    // A fortnight later: two working days after the last of the carving are long over, and so is the fitting of the top.
+    const { request } = programmeFor([panel], { marks, from_minutes: 14 * day + 8 * hour });
+    const ended = (1 + (carving.length - 1)) * day + 630;
+    expect(request.tasks.find(({ id }) => id === 'member/carved')?.happened).toEqual({
+      ...{ start_minutes: ended, end_minutes: ended, left_minutes: 0, personIds: [] },
+    });
+    const plan = programme(request, { limit: { nodes: 1 } });
+    expect(plan.tasks.find(({ taskId }) => taskId === `${water}/size-coat/1.1`)?.start_minutes).toBe(
+      14 * day + 8 * hour,
+    );
+  });
+
   it('keeps others from the people and places that are promised elsewhere', () => {
     const places = [{ id: 'rack', name: 'Rack', kind: 'rack' as const, capacity: 2 }];
     const span = { start_minutes: 480, end_minutes: 900 };

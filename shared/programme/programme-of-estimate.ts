@@ -24,6 +24,7 @@ import type { PromisedWork } from '#shared/programme/promised-work';
 import { requestFindings } from '#shared/programme/request-findings';
 import type { Shop } from '#shared/programme/shop';
 import { shopCalendarOf } from '#shared/programme/shop-calendar-of';
+import { unattendedMarks } from '#shared/programme/unattended-marks';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import type { Finding } from '#shared/words/finding';
 
@@ -132,7 +133,11 @@ function approvalsOf({ lot, blocks }: PlannedLot, carved: readonly MemberCarving
 }
 
 /** What a person pinned and what has happened, in the minutes of the frame. */
-function stood({ task, item }: ItemTask, { inputs, marks, frame }: ProgrammeOfEstimateInput): ItemTask {
+function stood(
+  { task, item }: ItemTask,
+  { inputs, frame }: ProgrammeOfEstimateInput,
+  marks: readonly TaskMark[],
+): ItemTask {
   const pin = inputs.pins.find(({ taskId }) => taskId === task.id);
   const mark = marks.find(({ taskId }) => taskId === task.id);
   const pinned_minutes = pin ? minutesOf(pin.at, frame) : null;
@@ -185,9 +190,7 @@ function requestOf(
 export function programmeOfEstimate(asked: ProgrammeOfEstimateInput): EstimateProgramme {
   const lots = plannedLots(asked);
   const carved = carvingOf(asked);
-  const tasks = [...carved.flatMap((one) => one.tasks), ...lots.flatMap(({ blocks }) => tasksOf(blocks))].map((one) =>
-    stood(one, asked),
-  );
+  const made = [...carved.flatMap((one) => one.tasks), ...lots.flatMap(({ blocks }) => tasksOf(blocks))];
   const lags = [
     ...carved.flatMap((one) => one.lags),
     ...lots.flatMap((lot) => [...afterCarving(lot, carved), ...lotLags(lot.blocks, lot.lot.buildUp)]),
@@ -196,8 +199,10 @@ export function programmeOfEstimate(asked: ProgrammeOfEstimateInput): EstimatePr
   const approvals = lots.flatMap((lot) => approvalsOf(lot, carved, asked)).map((one) => given(one, asked));
   const { paces, findings } = dryingPaces(airOf(asked), asked.frame, asked.card.drying);
   const carving = carved.flatMap((one) => one.tasks).map(({ task }) => task);
+  const items = made.map(({ item }) => item);
+  const marks = unattendedMarks({ items, lags, paces, approvals, marks: asked.marks, frame: asked.frame });
+  const tasks = made.map((one) => stood(one, asked, marks));
   const request = requestOf(asked, { tasks, lags, approvals, lots, carving, paces });
-  const items = tasks.map(({ item }) => item);
   const told = [...findings, ...requestFindings(request, items, asked.shop)];
   return { request, items, approvals, otherSizes: otherSizes(lots, lags, asked.card), findings: told };
 }

@@ -518,6 +518,36 @@ describe('The bench', () => {
     expect(((await mark('not-started')).body as BenchTask).state).toBe('ready');
   });
 
+  test('goes on from carving to the size coat: several grades end it together, and an approval given meanwhile is known', async () => {
+    const { estimateId, programme } = await acceptedSample(api.ours, api, api.ours.people.bench);
+    const bench = api.as('bench');
+    const { items, inputs, approvals, version } = programme;
+    const carving = items.filter(({ kind }) => kind === 'carving').map(({ taskId }) => taskId);
+    const size = items.find(({ kind }) => kind === 'size-coat')?.taskId ?? '';
+    expect([carving.length > 1, items.some(({ kind }) => kind === 'carved')]).toEqual([true, true]);
+    const stateOf = async (taskId: string) => {
+      const { plan } = await programmeOf(api.ours, estimateId);
+      const planned = plan?.tasks.find((task) => task.taskId === taskId);
+      const day = new Date(instant(programme, planned?.start_minutes ?? 0)).toISOString().slice(0, 10);
+      const query = { day, personId: planned?.personIds[0] };
+      const read = await told<BenchDay>(owner, readBenchDay, { query });
+      return read.tasks.find((task) => task.taskId === taskId)?.state;
+    };
+    for (const taskId of carving)
+      for (const mark of ['started', 'finished'])
+        await told(bench, markTask, { ...at(estimateId), body: { taskId, mark, at: null, left_minutes: null } });
+    expect(await stateOf(size)).toBe('waiting');
+    const given = approvals.map(({ approvalId }) => ({ approvalId, at: api.clock.now().toISOString() }));
+    const { version: current } = await programmeOf(api.ours, estimateId);
+    expect(current).toBe(version);
+    const body = { ...inputs, approvals: given };
+    await told(owner, keepProgramme, { ...at(estimateId), version: current, body });
+    expect(await stateOf(size)).toBe('ready');
+    const { request } = await programmeOf(api.ours, estimateId);
+    const carved = request.tasks.find(({ id }) => id.endsWith('/carved'));
+    expect(carved?.happened).toMatchObject({ left_minutes: 0, personIds: [] });
+  });
+
   test('reads nobody else’s day, and of an unknown sign-in nothing', async () => {
     const { content } = await shopWith(api.ours, api.ours.people.bench);
     const bench = api.as('bench');

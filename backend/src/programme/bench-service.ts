@@ -78,7 +78,7 @@ export class BenchService {
     const jobs = promised.map((job): BenchJob => ({
       ...{ estimateId: job.estimateId, plan: job.plan, items: job.items, placeHolds: job.placeHolds, paces: job.paces },
       ...{ number: names.get(job.jobId)?.number ?? '', title: names.get(job.jobId)?.title ?? '' },
-      ...{ lags: job.kept.lags, approvals: job.kept.approvals },
+      ...{ lags: job.kept.lags, approvals: job.approvals },
       ...{ revision: job.kept.revision, keptAt: job.kept.keptAt },
       marks: rows.filter(({ programmeId }) => programmeId === job.estimateId).map(presentMark),
     }));

@@ -10,6 +10,8 @@ export interface PromisedRow {
   readonly standing: Standing;
   readonly holdUntil: string | null;
   readonly kept: Buffer;
+  /** The approvals that were given (GivenApproval), as JSON. */
+  readonly approvals: string;
 }
 
 /** An accepted estimate that has no plan. */
@@ -24,6 +26,7 @@ export interface UnplannedRow {
  */
 const promisedSql = `
   SELECT p.id AS id, e.job_id AS jobId, p.kept AS kept, p.hold_until AS holdUntil,
+    CAST(JSON_EXTRACT(p.inputs, '$.approvals') AS CHAR) AS approvals,
     IF(EXISTS (SELECT 1 FROM issues i WHERE i.workshop_id = p.workshop_id AND i.estimate_id = p.id AND i.state = 'accepted'),
       'accepted', 'held') AS standing
   FROM programmes p

@@ -1,5 +1,6 @@
 import type { Standing } from '#shared/programme/board-schema';
-import { minutesBetween, programmeFrame, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import { minutesBetween, minutesOf, programmeFrame, type ProgrammeFrame } from '#shared/programme/programme-frame';
+import type { GivenApproval } from '#shared/programme/programme-inputs';
 import { promisedWork, type PromisedPlan } from '#shared/programme/promised-plan';
 import type { PromisedWork } from '#shared/programme/promised-work';
 import { type KeptPlan, planIn, unpackedPlan } from './kept-plan';
@@ -11,8 +12,18 @@ export interface PromisedJob extends PromisedPlan {
   readonly standing: Standing;
   readonly holdUntil: string | null;
   readonly kept: KeptPlan;
+  /** What is approved, as it is given by now: it may have been since the plan was kept. */
+  readonly approvals: KeptPlan['approvals'];
   /** Paces with their stretches in the same minutes. */
   readonly paces: KeptPlan['paces'];
+}
+
+function approvalsNow({ approvals }: KeptPlan, row: PromisedRow, frame: ProgrammeFrame): KeptPlan['approvals'] {
+  const given = new Map((JSON.parse(row.approvals) as GivenApproval[]).map(({ approvalId, at }) => [approvalId, at]));
+  return approvals.map((approval) => {
+    const at = given.get(approval.id);
+    return { ...approval, given_minutes: at === undefined ? null : minutesOf(at, frame) };
+  });
 }
 
 function promisedJob(row: PromisedRow, frame: ProgrammeFrame): PromisedJob {
@@ -30,6 +41,7 @@ function promisedJob(row: PromisedRow, frame: ProgrammeFrame): PromisedJob {
     standing,
     holdUntil,
     kept,
+    approvals: approvalsNow(kept, row, frame),
     items,
     placeHolds,
     paces,
