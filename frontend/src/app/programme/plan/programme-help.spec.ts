@@ -1,4 +1,5 @@
 import { TestBed } from '@angular/core/testing';
+import { programme } from '#shared/programme/programme';
 import { signIn, words } from '../../../test/sign-in';
 import { AnsweringForSpecs } from '../answering-for-specs';
 import { NOW } from '../../core/now';
@@ -8,21 +9,25 @@ import { PLANNING_STARTER } from './planning-starter';
 import { programmeForSpecs } from './programme-for-specs';
 import { ProgrammePlanning } from './programme-planning';
 import { ProgrammeStore } from './programme-store';
-import { asItIs, WhatIfComparison } from './what-if-comparison';
+import { asItIs, WhatIfComparison, type AskedWay } from './what-if-comparison';
 
 const stands = programmeForSpecs();
+const day = 1440;
 
 const rates = ['carver', 'gilder'].map((gradeId) => ({ gradeId, costPerHour: '30.00' }));
 
-async function opened(read = stands, worker: () => EventTarget = () => new PlanningHereForSpecs()) {
+async function opened(
+  read = stands,
+  worker: () => EventTarget = () => new PlanningHereForSpecs(),
+  from_minutes = 3 * day,
+) {
   const { firstDay, startsAt, timeZone, request, items } = read;
   const server = new AnsweringForSpecs({
     readProgramme: () => read,
     readShop: () => ({ content: { people: [] } }),
     readWhatIf: () => ({
       ...{ firstDay, startsAt, timeZone, items, findings: [], rates, setUp_hours: 0, digits: 2, overtime_percent: 40 },
-      // Asked on the third day, so that all of it would begin only then.
-      request: { ...request, start_minutes: 3 * 1440 },
+      request: { ...request, start_minutes: from_minutes },
       ...{ cost_minor: 100_000, costDifference_minor: 0, gross_minor: 150_000, grossDifference_minor: 0 },
     }),
   });
@@ -43,12 +48,24 @@ async function opened(read = stands, worker: () => EventTarget = () => new Plann
 const tooSoon = programmeForSpecs({ inputs: { ...stands.inputs, direction: 'backward', day: '2027-01-04' } });
 
 describe('As it is', () => {
-  it('never ends later than the plan that is kept', async () => {
-    await opened();
+  const plannedFrom = async (from_minutes: number, ways: readonly AskedWay[]) => {
+    await opened(stands, () => new PlanningHereForSpecs(), from_minutes);
     const comparison = TestBed.inject(WhatIfComparison);
-    await comparison.compare(stands.estimateId, stands.inputs, [{ name: 'As it is', whatIf: asItIs }]);
-    const kept = Date.parse(stands.startsAt) + (stands.plan?.finish_minutes ?? 0) * 60_000;
-    expect(comparison.ways().map(({ readyAt }) => readyAt)).toEqual([new Date(kept).toISOString()]);
+    await comparison.compare(stands.estimateId, stands.inputs, ways);
+    return comparison.ways().map(({ readyAt }) => Date.parse(readyAt ?? ''));
+  };
+  const asItStands = { name: 'As it is', whatIf: asItIs };
+  const kept = Date.parse(stands.startsAt) + (stands.plan?.finish_minutes ?? 0) * 60_000;
+
+  it('never ends later than the plan that is kept, while nothing of that is past', async () => {
+    expect(await plannedFrom(0, [asItStands])).toEqual([kept]);
+  });
+
+  it('begins no sooner than the other ways, where what is kept should have begun by now and was not marked', async () => {
+    const asked = await plannedFrom(3 * day, [asItStands, { name: 'Again', whatIf: asItIs }]);
+    const anew = programme({ ...stands.request, start_minutes: 3 * day }).finish_minutes ?? 0;
+    expect(asked).toEqual([asked[1], Date.parse(stands.startsAt) + anew * 60_000]);
+    expect(asked[0]).toBeGreaterThan(kept);
   });
 });
 

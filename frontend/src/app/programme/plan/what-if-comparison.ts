@@ -29,8 +29,9 @@ export interface ComparedWay {
 
 export const asItIs: WhatIf = { day: null, climate: null, furtherGradeIds: [], lots: [] };
 
-/** Long enough for a plan that can be compared. */
+/** Long enough for a plan that can be compared, and to see what a kept plan comes to from now on. */
 const seconds = 6;
+const replanSeconds = 2;
 
 /** How minutes of an answer are read. */
 export const frameOfWhatIf = ({ firstDay, startsAt, timeZone }: WhatIfAnswer): ProgrammeFrame => ({
@@ -56,10 +57,10 @@ interface FramedPlan {
   readonly frame: ProgrammeFrame;
 }
 
-const isSooner = (one: Programme, other: Programme): boolean =>
-  (one.finish_minutes ?? Infinity) < (other.finish_minutes ?? Infinity);
-
-/** Plans ways of doing it one after another, so that they stand side by side by finish and cost; nothing is kept. */
+/**
+ * Plans ways of doing it one after another, all from the same moment on, so that they stand side by side by finish and cost; nothing is kept. As it is means
+ * going on with the plan that is kept: what of it should have begun by now and was not marked is still to be done, there as in every other way.
+ */
 @Injectable()
 export class WhatIfComparison {
   private readonly client = inject(ProgrammeClient);
@@ -100,17 +101,28 @@ export class WhatIfComparison {
 
   private async worked(estimateId: string, { direction, day }: ProgrammeInputs, way: AskedWay): Promise<ComparedWay> {
     const answer = await this.client.whatIf(estimateId, way.whatIf);
+    const { request } = answer;
     const until = minutesOfDay(addDays(way.whatIf.day ?? day, 1), frameOfWhatIf(answer));
-    const known = this.first ?? this.kept();
-    const incumbent = known && shiftedPlan(known.plan, minutesBetween(known.frame, frameOfWhatIf(answer)));
+    const incumbent = direction === 'forward' ? await this.known(answer) : undefined;
     const search = direction === 'backward' ? { backwardFrom_minutes: until } : incumbent ? { incumbent } : {};
-    const found = await this.planner.plan({ request: answer.request, search, seconds });
-    const plan = !this.first && incumbent && isSooner(incumbent, found) ? incumbent : found;
+    const plan = await this.planner.plan({ request, search, seconds });
     this.first ??= { plan, frame: frameOfWhatIf(answer) };
     return compared(way.name, answer, plan);
   }
 
-  /** The plan that is kept, as long as it holds: as it is, it never ends later. */
+  /** The plan of the first way; for the first way itself what is kept, with only that moved which can no longer stand from now on. */
+  private async known(answer: WhatIfAnswer): Promise<Programme | undefined> {
+    const known = this.first ?? this.kept();
+    if (!known) return undefined;
+    const plan = shiftedPlan(known.plan, minutesBetween(known.frame, frameOfWhatIf(answer)));
+    if (this.first) return plan;
+    const search = { previous: plan };
+    const moved = await this.planner.plan({ request: answer.request, search, seconds: replanSeconds });
+    if (this.isStopped) throw new PlanningStopped();
+    return moved;
+  }
+
+  /** The plan that is kept, as long as it holds. */
   private kept(): FramedPlan | undefined {
     const [shown, frame] = [this.store.answer(), this.store.frame()];
     return shown?.isCurrent && shown.plan && frame ? { plan: shown.plan, frame } : undefined;
