@@ -44,7 +44,9 @@ function zoneReasons({ radius, halfHeight }: Spheroid, height_mm: number, area_m
 }
 
 function foot(shape: BallFootShape | BunFootShape, body: Spheroid): Surface {
-  const limits = [shape.cutBottom_mm - body.halfHeight, body.halfHeight - shape.cutTop_mm] as const;
+  const bottom_mm = shape.cutBottom_mm - body.halfHeight;
+  // Cut away to the last hair, the top may come out below the bottom by a rounding.
+  const limits = [bottom_mm, Math.max(bottom_mm, body.halfHeight - shape.cutTop_mm)] as const;
   const [bottom_mm2, top_mm2] = limits.map((height) => circleArea(2 * spheroidRadiusAt(body, height)));
   const area_mm2 = spheroidZoneArea(body, limits);
   const sides = round(area_mm2, zoneReasons(body, limits[1] - limits[0], area_mm2));

@@ -60,6 +60,11 @@ describe('The developed surface', () => {
       25_132.7412 + 5026.5482,
     ],
     [
+      'a ball foot of 3 1/4 in cut away by 3 in and 1/4 in, whose floats come to a hair less than nothing',
+      { kind: 'ball-foot', diameter_mm: 82.55, cutTop_mm: 76.2, cutBottom_mm: 6.35, ends: noEnds },
+      0,
+    ],
+    [
       'a bun foot as high as wide is a ball foot',
       { kind: 'bun-foot', diameter_mm: 100, height_mm: 100, cutTop_mm: 0, cutBottom_mm: 20, ends: noEnds },
       25_132.7412,

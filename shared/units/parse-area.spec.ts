@@ -31,7 +31,8 @@ describe('parseArea', () => {
   it.each([
     ['nothing', '', 'entry-missing'],
     ['words', 'about a metre', 'area-unclear'],
-    ['a negative area', '-5 cm²', 'area-unclear'],
+    ['a negative area', '-5 cm²', 'area-negative'],
+    ['a negative area with a true minus', '−5', 'area-negative'],
   ])('asks again for %s', (_, text, code) => {
     expect(parseArea(text, reading)).toMatchObject({ ok: false, code });
   });

@@ -30,6 +30,7 @@ export function parseArea(text: string, { unit, locale }: AreaReading): Parsed<{
   const plain = text.trim();
   const sign = decimalSign(locale);
   if (plain === '') return unread('entry-missing');
+  if (/^[-−]/.test(plain)) return unread('area-negative');
   const [, figure = plain, named] = written.exec(plain) ?? [];
   const decimal = plainDecimal(named ? ungrouped(figure.trim(), locale) : figure.trim(), sign);
   if (decimal === null)

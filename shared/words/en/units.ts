@@ -29,6 +29,7 @@ export const units = {
   'length-negative': 'A length cannot be negative.',
   'length-fraction': 'Fractions are read in inches; please add “in” or ″.',
   'length-inches-over': 'After feet, the inches stay below 12.',
+  'area-negative': 'An area cannot be negative.',
   'area-unclear': 'Please write an area such as {example}.',
   'length-too-large': 'That length is too large.',
   'triple-low-above': 'The low figure must not be above the likely one.',

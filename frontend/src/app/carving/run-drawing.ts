@@ -59,7 +59,7 @@ export class RunDrawing {
 
   private wordsOfPart(shown_mm: number, length_mm: number): { words?: string } {
     if (shown_mm >= length_mm) return {};
-    const [shown, whole] = [shown_mm, length_mm].map((each_mm) => this.formats.length(Math.round(each_mm)));
+    const [shown, whole] = [shown_mm, length_mm].map((each_mm) => this.formats.roughLength(each_mm));
     return { words: $localize`${shown}:shown: shown of ${whole}:length:` };
   }
 }

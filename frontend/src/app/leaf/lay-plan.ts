@@ -76,7 +76,7 @@ export class LayPlanDrawing {
     const [along, ...others] = view.dimensions;
     if (plan.shownLength_mm >= plan.length_mm - 1e-6 || !along) return view;
     const [shown, whole] = [plan.shownLength_mm, plan.length_mm].map((length_mm) =>
-      this.formats.length(Math.round(length_mm)),
+      this.formats.roughLength(length_mm),
     );
     return {
       ...view,

@@ -5,6 +5,7 @@ import { textOf } from '#shared/money/text-of';
 import { formatDecimal } from '#shared/units/format-decimal';
 import { formatLength } from '#shared/units/format-length';
 import { formatsFor } from '#shared/units/formats-for';
+import { roughLength } from '#shared/units/rough-length';
 import { trueMinus } from '#shared/units/true-minus';
 import { Session } from '../session/session';
 import { CATALOGUE } from './catalogue';
@@ -47,6 +48,11 @@ export class Formats {
 
   length(length_mm: number): string {
     return this.figure('mm', length_mm);
+  }
+
+  /** A length in a list or on a drawing, where nobody reads more than the millimetre or the 32nd. */
+  roughLength(length_mm: number): string {
+    return this.length(roughLength(length_mm, this.lengthUnit()));
   }
 
   area(area_mm2: number): string {

@@ -62,7 +62,7 @@ export class SurfaceFigures {
     const figures = this.figures();
     if (!figures) return [];
     const count = this.selection.member()?.count ?? 1;
-    const off = figures.uncertainty_mm2 ? ` ± ${this.formats.area(figures.uncertainty_mm2)}` : '';
+    const off = this.off(figures.uncertainty_mm2 ?? 0, figures.developed_mm2);
     const area = (name: string, area_mm2: number) => ({
       name,
       text: this.formats.area(area_mm2),
@@ -79,6 +79,12 @@ export class SurfaceFigures {
       ...(figures.bare_mm2 > 0 ? [area($localize`Left bare`, figures.bare_mm2)] : []),
     ];
   });
+
+  /** How far off, as a share to two figures: the areas themselves may be written in different units. */
+  private off(uncertainty_mm2: number, developed_mm2: number): string {
+    if (!(uncertainty_mm2 > 0 && developed_mm2 > 0)) return '';
+    return ` ± ${this.formats.figure('percent', Number(((100 * uncertainty_mm2) / developed_mm2).toPrecision(2)))}`;
+  }
 
   constructor() {
     // Where there is room beside it, the surface of the member one comes to explains itself unasked.

@@ -24,7 +24,7 @@ export class MemberRows {
     if (member.count > 1) return `× ${this.formats.number(member.count, 0)}`;
     const run_mm = store.figures()?.members.find(({ memberId }) => memberId === member.id)?.run_mm;
     const isRunning = member.shape.kind === 'moulding' || member.shape.kind === 'band';
-    return isRunning && run_mm ? this.formats.length(Math.round(run_mm)) : '1';
+    return isRunning && run_mm ? this.formats.roughLength(run_mm) : '1';
   }
 }
 
