@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { alternativeSectionsSchema } from '#shared/estimates/alternative-sections-schema';
 import { figuresSchema, pricedFiguresSchema } from '#shared/estimates/figures-schema';
 import { workFiguresSchema } from '#shared/estimates/work-figures-schema';
 import { memberContentSchema, pieceContentSchema } from '#shared/estimates/member-schema';
@@ -90,13 +91,14 @@ export const alternativeTallySchema = z.strictObject({
   weeks: z.number(),
 });
 
-/** An alternative by itself: its gross total and what it is more or less than the base, in minor units, and what it takes. */
+/** An alternative by itself: its gross total and what it is more or less than the base, in minor units, what it takes, and the sections it changes. */
 export const alternativeTotalSchema = z.strictObject({
   id: identifier,
   gross_minor: z.int(),
   difference_minor: z.int(),
-  /** Issues made before it was kept have none. */
+  /** Issues made before these were kept have none. */
   tally: alternativeTallySchema.optional(),
+  sections: alternativeSectionsSchema.optional(),
 });
 
 /** Who else is at work on the estimate, and its version, so that a page knows when to read it again. */

@@ -58,6 +58,8 @@ export function sampleSnapshot(
     card,
     choice,
     figures: choice.length === 0 ? base : figuresOf(draft, choice, at),
-    alternatives: draft.settings.alternatives.map(({ id }) => alternativeTotal(id, base, figuresOf(draft, [id], at))),
+    alternatives: draft.settings.alternatives.map((alternative) =>
+      alternativeTotal({ draft, alternative }, base, figuresOf(draft, [alternative.id], at)),
+    ),
   };
 }

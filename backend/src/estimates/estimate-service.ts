@@ -130,7 +130,11 @@ export class EstimateService {
     const card = await this.cardOf(whole);
     const worked = (choice: Choice) => this.parts.risks.priced(inputOf(whole, card, choice));
     const base = await worked([]);
-    return Promise.all(alternatives.map(async ({ id }) => alternativeTotal(id, base, await worked([id]))));
+    return Promise.all(
+      alternatives.map(async (alternative) =>
+        alternativeTotal({ draft, alternative }, base, await worked([alternative.id])),
+      ),
+    );
   }
 
   /** Keeps a list of changes, all or nothing, and answers the figures of record. */

@@ -311,12 +311,66 @@ describe('The pages of issues', () => {
       expect(element().querySelectorAll('app-frozen-dates li')).toHaveLength(2);
     });
 
-    it('shows what its alternatives came to', async () => {
+    describe('with alternatives', () => {
       const alternative = { id: ids.leg, name: 'Bare at the back', group: '', note: '', replaces: [] };
-      server.settings = { ...server.settings, alternatives: [alternative] };
-      read = { alternatives: [{ id: ids.leg, gross_minor: 55_000, difference_minor: -5000 }] };
-      await open(IssueViewPage, view);
-      expect(spoken(element().querySelector('app-frozen-alternatives tbody'))).toBe('Bare at the back€550.00−€50.00');
+      const total = { id: ids.leg, gross_minor: 55_000, difference_minor: -5000 };
+      const cells = () =>
+        [...element().querySelectorAll('app-frozen-alternatives tbody tr')].map((row) =>
+          [...row.querySelectorAll('td')].map(spoken),
+        );
+      const sides = () =>
+        [...element().querySelectorAll('app-alternative-sections section')].map((side) => [
+          spoken(side.querySelector('h4')),
+          side.querySelectorAll('svg').length,
+        ]);
+
+      beforeEach(() => {
+        server.settings = { ...server.settings, alternatives: [alternative] };
+      });
+
+      it('shows each beside the base with its leaf, hours, days and price, and the sections it changes', async () => {
+        const { tally, price } = (await server.read()).figures;
+        const own = { booklets: tally.booklets + 3, hours: 12.5, workingDays: 4, weeks: 2.5 };
+        const layers = [
+          ...[{ stepId: '', name: 'Wood', coats: [0, 0], colour: 'wood', thickness: 6, thickness_mm: null } as const],
+          ...[
+            {
+              stepId: 's',
+              name: 'Oil',
+              coats: [1, 1],
+              colour: 'oil-size',
+              thickness: 0.4,
+              thickness_mm: null,
+            } as const,
+          ],
+        ];
+        const section = { buildUp: 'Oil gilding', zoneIds: [], leaf: [], timber: 'Lime', layers };
+        const gross_minor = price.gross_minor - 5000;
+        const sections = { before: [section], after: [] };
+        read = { alternatives: [{ ...total, gross_minor, tally: own, sections }] };
+        await open(IssueViewPage, view);
+        const [base, bare] = cells();
+        const written = (minor: number) => (minor / 100).toLocaleString('en', { minimumFractionDigits: 2 });
+        expect([base[0], base[1], base[5]]).toEqual(['The base', String(tally.booklets), written(price.gross_minor)]);
+        expect([bare[0], bare[1]]).toEqual(['Bare at the back', `${tally.booklets + 3}+3`]);
+        expect(bare.slice(2, 5).map((cell) => Number.parseFloat(cell))).toEqual([12.5, 4, 2.5]);
+        expect(bare[5]).toBe(`${written(gross_minor)}−50.00`);
+        expect(sides()).toEqual([
+          ['In the base', 1],
+          ['With “Bare at the back”', 0],
+        ]);
+      });
+
+      it('says nothing of what issues did not keep when it was made, and leaves out what was not offered', async () => {
+        const empty = { ...alternative, id: ids.edge, name: 'Nothing in it' };
+        server.settings = { ...server.settings, alternatives: [alternative, empty] };
+        read = { alternatives: [total] };
+        await open(IssueViewPage, view);
+        const unknown = expect.stringMatching(/^–/) as string;
+        const price = expect.stringMatching(/^550.00/) as string;
+        expect(cells().slice(1)).toEqual([['Bare at the back', unknown, unknown, unknown, unknown, price]]);
+        expect(sides()).toEqual([]);
+      });
     });
   });
 

@@ -1,7 +1,5 @@
-import { signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { AlternativeCards } from './alternative-cards';
-import { AlternativeColumns } from './alternative-columns';
 import type { AlternativeRow } from './alternative-rows';
 
 const row = (id: string, given: Partial<AlternativeRow>): AlternativeRow => ({
@@ -10,16 +8,14 @@ const row = (id: string, given: Partial<AlternativeRow>): AlternativeRow => ({
 });
 
 describe('AlternativeCards', () => {
-  const columns = {
-    figures: signal([
-      { key: 'hours', heading: 'Hours', kind: 'figure', text: () => '12.5', minor: ({ id }: AlternativeRow) => id },
-    ]),
-  };
+  const columns = [
+    { key: 'hours', heading: 'Hours', kind: 'figure', text: () => '12.5', minor: ({ id }: AlternativeRow) => id },
+  ];
   const rows = [row('base', { isBase: true }), row('oil', { note: 'A softer shine' }), row('bare', {})];
 
   function cards(isSelectable: boolean) {
-    TestBed.configureTestingModule({ providers: [{ provide: AlternativeColumns, useValue: columns }] });
     const fixture = TestBed.createComponent(AlternativeCards);
+    fixture.componentRef.setInput('columns', columns);
     fixture.componentRef.setInput('rows', rows);
     fixture.componentRef.setInput('selectable', isSelectable);
     fixture.detectChanges();

@@ -1,5 +1,5 @@
-import { ChangeDetectionStrategy, Component, booleanAttribute, inject, input, model } from '@angular/core';
-import { AlternativeColumns } from './alternative-columns';
+import { ChangeDetectionStrategy, Component, booleanAttribute, input, model } from '@angular/core';
+import type { FigureColumn } from '../../ui/table/figure-column';
 import type { AlternativeRow } from './alternative-rows';
 
 /** The base and its alternatives on a phone: a card each, every figure with its label and the difference to the base. */
@@ -29,7 +29,7 @@ import type { AlternativeRow } from './alternative-rows';
             <p class="muted small">{{ row.note }}</p>
           }
           <dl>
-            @for (column of columns.figures(); track column.key) {
+            @for (column of columns(); track column.key) {
               <div>
                 <dt>{{ column.heading }}</dt>
                 <dd>
@@ -48,8 +48,7 @@ import type { AlternativeRow } from './alternative-rows';
   styleUrl: './alternative-cards.scss',
 })
 export class AlternativeCards {
-  protected readonly columns = inject(AlternativeColumns);
-
+  readonly columns = input.required<readonly FigureColumn<AlternativeRow>[]>();
   readonly rows = input.required<readonly AlternativeRow[]>();
   readonly selectable = input(false, { transform: booleanAttribute });
   readonly chosen = model<string>();

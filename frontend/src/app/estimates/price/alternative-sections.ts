@@ -1,25 +1,14 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
-import { alternativeZones } from '#shared/estimates/alternative-zones';
-import { buildUpsUsed } from '#shared/estimates/buildups-used';
-import type { Figures, ZoneFigures } from '#shared/estimates/figures';
-import type { Alternative } from '#shared/estimates/settings';
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import type { AlternativeSections as Sections } from '#shared/estimates/alternative-sections';
 import { stripLayers } from '../../buildups';
 import { SectionStrip } from '../../ui/drawing/section-strip';
-import { AlternativeTotals } from './alternative-totals';
 
-/** What a zone’s wood is called, by its member. */
-const timberOf = ({ members }: Figures, zones: readonly ZoneFigures[], ids: readonly string[]) => {
-  const memberIds = new Set(zones.filter(({ zoneId }) => ids.includes(zoneId)).map(({ memberId }) => memberId));
-  const timbers = members.filter(({ memberId }) => memberIds.has(memberId)).map(({ timber }) => timber);
-  return [...new Set(timbers)].join(', ');
-};
-
-const stripsOf = (figures: Figures, zones: readonly ZoneFigures[]) =>
-  buildUpsUsed(zones).map(({ buildUp, layers, leaf, zoneIds }) => ({
+const stripsOf = (sections: Sections['before']) =>
+  sections.map(({ buildUp, layers, leaf, timber }) => ({
     name: buildUp,
     layers: stripLayers(
       layers.map((layer) => ({ ...layer, coats: layer.coats[1] })),
-      { timber: timberOf(figures, zones, zoneIds), leaf: leaf.join(', ') },
+      { timber, leaf: leaf.join(', ') },
     ),
   }));
 
@@ -29,18 +18,16 @@ const stripsOf = (figures: Figures, zones: readonly ZoneFigures[]) =>
   imports: [SectionStrip],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    @if (sides(); as sides) {
-      @for (side of sides; track side.key) {
-        <section>
-          <h4>{{ side.heading }}</h4>
-          @for (strip of side.strips; track $index) {
-            <p>{{ strip.name }}</p>
-            <app-section-strip [layers]="strip.layers" />
-          } @empty {
-            <p class="muted" i18n>No coats.</p>
-          }
-        </section>
-      }
+    @for (side of sides(); track side.key) {
+      <section>
+        <h4>{{ side.heading }}</h4>
+        @for (strip of side.strips; track $index) {
+          <p>{{ strip.name }}</p>
+          <app-section-strip [layers]="strip.layers" />
+        } @empty {
+          <p class="muted" i18n>No coats.</p>
+        }
+      </section>
     }
   `,
   styles: `
@@ -67,20 +54,17 @@ const stripsOf = (figures: Figures, zones: readonly ZoneFigures[]) =>
   `,
 })
 export class AlternativeSections {
-  private readonly totals = inject(AlternativeTotals);
+  readonly name = input.required<string>();
+  /** Undefined until it is worked. */
+  readonly sections = input.required<Sections | undefined>();
 
-  readonly alternative = input.required<Alternative>();
-
-  /** Undefined until it is worked, and where it changes nothing that is coated. */
+  /** None where it changes nothing that is coated. */
   protected readonly sides = computed(() => {
-    const [worked, alternative] = [this.totals.worked(), this.alternative()];
-    const own = worked?.own.get(alternative.id);
-    if (!worked || !own) return undefined;
-    const { before, after } = alternativeZones(worked.asked.draft, alternative, { base: worked.base, own });
-    const sides = [
-      { key: 'base', heading: $localize`In the base`, strips: stripsOf(worked.base, before) },
-      { key: 'own', heading: $localize`With “${alternative.name}:name:”`, strips: stripsOf(own, after) },
+    const { before = [], after = [] } = this.sections() ?? {};
+    if (before.length + after.length === 0) return [];
+    return [
+      { key: 'base', heading: $localize`In the base`, strips: stripsOf(before) },
+      { key: 'own', heading: $localize`With “${this.name()}:name:”`, strips: stripsOf(after) },
     ];
-    return sides.some(({ strips }) => strips.length > 0) ? sides : undefined;
   });
 }

@@ -34,6 +34,12 @@ interface Worked {
   readonly own: ReadonlyMap<string, Figures>;
 }
 
+const totalsOf = ({ asked: { draft }, base, own }: Worked): AlternativeTotal[] =>
+  draft.settings.alternatives.flatMap((alternative) => {
+    const figures = own.get(alternative.id);
+    return figures ? [alternativeTotal({ draft, alternative }, base, figures)] : [];
+  });
+
 /** The base as an alternative stands beside it: gross, and what it takes. */
 export type BaseTotal = Pick<AlternativeTotal, 'gross_minor' | 'tally'>;
 
@@ -62,8 +68,8 @@ export class AlternativeTotals {
     const isAsked = draft !== undefined && draft.settings.alternatives.length > 0;
     return isAsked && card && currency ? { draft, card, currency } : undefined;
   });
-  /** What was worked last on this page, with its zones; undefined where the server tells the totals. */
-  readonly worked = this.lastWorked.asReadonly();
+  /** What was worked last on this page; undefined where the server tells the totals. */
+  private readonly worked = this.lastWorked.asReadonly();
   /** The base beside which they stand; for whom the server tells them, that is what the estimate shows. */
   readonly base = computed<BaseTotal | undefined>(() => {
     const [worked, priced] = [this.worked()?.base, this.store.priced()];
@@ -73,7 +79,7 @@ export class AlternativeTotals {
   /** What was worked last, by id; the figures of a moment ago while `isPending`. */
   readonly totals = computed<ReadonlyMap<string, AlternativeTotal>>(() => {
     const [told, worked] = [this.told.hasValue() ? this.told.value() : [], this.worked()];
-    const own = worked && [...worked.own].map(([id, figures]) => alternativeTotal(id, worked.base, figures));
+    const own = worked && totalsOf(worked);
     return new Map((own ?? told).map((total) => [total.id, total]));
   });
   readonly isPending = computed(

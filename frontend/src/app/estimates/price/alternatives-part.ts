@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
+import { Formats } from '../../core/formats/formats';
 import { EmptyState } from '../../ui/page/empty-state';
 import { FindingList } from '../../ui/page/finding-list';
 import { smallScreen } from '../../ui/screen/small-screen';
@@ -18,7 +19,7 @@ import { AlternativeTotals } from './alternative-totals';
   selector: 'app-alternatives-part',
   imports: [AlternativeCards, AlternativeForm, AlternativeSections, EmptyState, FigureTable, FindingList, MatButton],
   changeDetection: ChangeDetectionStrategy.OnPush,
-  providers: [AlternativeActions, AlternativeColumns, AlternativeTotals],
+  providers: [AlternativeActions, AlternativeTotals],
   templateUrl: './alternatives-part.html',
   styles: `
     :host {
@@ -41,10 +42,15 @@ export class AlternativesPart {
   protected readonly isSmall = smallScreen();
   protected readonly store = inject(EstimateStore);
   protected readonly worked = inject(AlternativeTotals);
-  protected readonly columns = inject(AlternativeColumns);
 
   protected readonly chosen = signal<string | undefined>(undefined);
   protected readonly alternatives = computed(() => this.store.settings()?.alternatives ?? []);
+  protected readonly columns = new AlternativeColumns(inject(Formats), {
+    base: this.worked.base,
+    groups: computed(() => this.alternatives().map(({ group }) => group)),
+    seesPrices: this.store.seesPrices,
+    unknown: '…',
+  });
   protected readonly rows = computed(() =>
     alternativeRows(this.alternatives(), this.worked.base(), this.worked.totals()),
   );
