@@ -60,17 +60,21 @@ function brokenTogether({ tasks }: Programme): string[] {
 
 function brokenPlaces({ places, placeHolds }: ProgrammeRequest, { tasks }: Programme): string[] {
   const by = new Map(tasks.map((task) => [task.taskId, task]));
-  return places.flatMap(({ id, capacity }) => {
-    const holds = placeHolds
+  return places.flatMap(({ id, capacity, taken }) => {
+    const own = placeHolds
       .filter((hold) => hold.placeId === id)
       .map((hold) => ({
         amount: hold.amount,
         start: by.get(hold.fromTaskId)?.start_minutes ?? NaN,
         end: by.get(hold.untilTaskId)?.end_minutes ?? NaN,
       }));
+    const promised = taken.map(({ amount, start_minutes: start, end_minutes: end }) => ({ amount, start, end }));
+    const holds = [...own, ...promised];
     const used = (moment: number): number =>
       holds.reduce((sum, { amount, start, end }) => (start <= moment && moment < end ? sum + amount : sum), 0);
-    return holds.some(({ start }) => used(start) > capacity) ? [`${id}: room`] : [];
+    // Where the others take more than there is, nothing of this one may be there.
+    const isOwnThere = (moment: number): boolean => own.some(({ start, end }) => start <= moment && moment < end);
+    return holds.some(({ start }) => isOwnThere(start) && used(start) > capacity) ? [`${id}: room`] : [];
   });
 }
 

@@ -1,4 +1,5 @@
 import * as fc from 'fast-check';
+import { seededGenerator } from '#shared/estimates/risk/seeded-generator';
 import { brokenRulesForSpecs } from '#shared/programme/broken-rules-for-specs';
 import { programme } from '#shared/programme/programme';
 import type { Programme } from '#shared/programme/programme-plan';
@@ -18,6 +19,16 @@ const planned = requests
 const check = (runs: number, law: (made: { request: ProgrammeRequest; plan: Programme }) => void): void =>
   fc.assert(fc.property(planned, law), { numRuns: runs, seed: 1, endOnFailure: true });
 
+/** The same with the rack promised elsewhere, one place of it for one to three stretches of a few days. */
+function withPromisedRack(request: ProgrammeRequest, seed: number): ProgrammeRequest {
+  const next = seededGenerator(seed + 7);
+  const taken = Array.from({ length: 1 + (next() % 3) }, () => {
+    const start_minutes = next() % 12_000;
+    return { start_minutes, end_minutes: start_minutes + 600 + (next() % 4000), amount: 1 };
+  });
+  return { ...request, places: request.places.map((place) => ({ ...place, taken })) };
+}
+
 const finishOf = ({ finish_minutes }: Programme): number => finish_minutes ?? Infinity;
 const placesOf = ({ tasks }: Programme) =>
   tasks.map(({ taskId, start_minutes, end_minutes, personIds }) => [taskId, start_minutes, end_minutes, personIds]);
@@ -25,6 +36,17 @@ const placesOf = ({ tasks }: Programme) =>
 describe('Every programme', () => {
   it('keeps hours, grades, crews, lags, racks: nobody is at two places at once', () => {
     check(80, ({ request, plan }) => expect(brokenRulesForSpecs(request, plan)).toEqual([]));
+  });
+
+  it('comes to an end between what a rack is promised for elsewhere, and has room there', () => {
+    const most = 40;
+    const plans = Array.from({ length: 60 }, (_, seed) => {
+      const request = withPromisedRack(randomRequestForSpecs(seed, 5), seed);
+      return { request, plan: programme(request, { limit: { nodes: most } }) };
+    });
+    const found = plans.filter(({ plan }) => plan.finish_minutes !== null);
+    expect(found.length).toBeGreaterThan(40);
+    expect(found.flatMap(({ request, plan }) => brokenRulesForSpecs(request, plan))).toEqual([]);
   });
 
   it('ends no earlier than its bound, and is best where it meets it', () => {

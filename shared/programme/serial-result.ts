@@ -29,7 +29,12 @@ interface Waiting {
   readonly isDone: boolean[];
   readonly queue: number[];
   readonly urgency: readonly number[];
+  /** How often each had to give way. */
+  readonly gaveWay: number[];
 }
+
+/** Two that want one place could send each other away for ever: who had to give way so often stays. */
+const mostGivingWay = 10;
 
 /** The plan in which blocks take their turn by the least priority of their tasks, each after those it waits for; as early as there is room. */
 export function serialResult(
@@ -41,7 +46,7 @@ export function serialResult(
   standing.forEach((position, task) => position && !network.tasks[task].anchor && plan.put(task, position));
   const isDone = blocks.map(({ tasks }) => tasks.every((task) => plan.positions[task] !== null));
   const urgency = blocks.map(({ tasks }) => Math.min(...tasks.map((task) => priorities[task])));
-  const waiting: Waiting = { blocks, isDone, urgency, queue: [] };
+  const waiting: Waiting = { blocks, isDone, urgency, queue: [], gaveWay: blocks.map(() => 0) };
   isDone.forEach((done, at) => !done && enqueue(waiting, at));
   while (waiting.queue.length > 0) {
     const place = nextPlaced(plan, waiting);
@@ -73,14 +78,15 @@ function enqueue({ queue, urgency }: Waiting, block: number): void {
 
 /** Places a block; what stands from an earlier plan and is in its way by a lag loses its place and waits again. */
 function placed(plan: SerialPlan, waiting: Waiting, at: number): boolean {
-  const { blocks, isDone } = waiting;
+  const { blocks, isDone, gaveWay } = waiting;
   for (const task of blocks[at].tasks) plan.lift(task);
   while (!plan.placeBlock(blocks[at])) {
     const inTheWay = plan.failure?.arc?.to ?? plan.failure?.holder;
     const other = blocks.findIndex(
       ({ tasks }, block) => block !== at && inTheWay !== undefined && tasks.includes(inTheWay),
     );
-    if (other < 0 || !isDone[other]) return false;
+    if (other < 0 || !isDone[other] || gaveWay[other] === mostGivingWay) return false;
+    gaveWay[other] += 1;
     for (const task of blocks[other].tasks) plan.lift(task);
     isDone[other] = false;
     enqueue(waiting, other);
