@@ -17,6 +17,8 @@ import { lettersAboutInvoices } from './0053-letters-about-invoices';
 import { severalMeasures } from './0054-several-measures';
 import { handsAndOvertime } from './0055-hands-and-overtime';
 import { currencyOfCards } from './0056-currency-of-cards';
+import { reachedStages } from './0057-reached-stages';
+import { leftSince } from './0058-left-since';
 
 /** Every step of the schema, in the order in which they are taken. A step that was released is never changed. */
 export const migrations: readonly Migration[] = [
@@ -38,4 +40,6 @@ export const migrations: readonly Migration[] = [
   severalMeasures,
   handsAndOvertime,
   currencyOfCards,
+  reachedStages,
+  leftSince,
 ];

@@ -9,8 +9,9 @@ const sums = { invoiced_minor: z.int(), credited_minor: z.int(), left_minor: z.i
 const nextClaimSchema = z.strictObject({
   claim: stageClaimSchema,
   name: z.string(),
-  /** The day it is planned for, where one was named. */
+  /** The day it is planned for and the one it was reached on, where they were named. */
   plannedOn: z.string().nullable(),
+  reachedOn: z.string().nullable(),
   net_minor: z.int(),
   gross_minor: z.int(),
 });
@@ -58,13 +59,18 @@ export const beginStageInvoice = endpoint({
   answers: sameForPriced(invoiceSchema),
 });
 
-export const planStage = endpoint({
-  name: 'planStage',
-  summary: 'Name the day a stage of a contract is planned to be invoiced on, or none',
+export const nameStageDay = endpoint({
+  name: 'nameStageDay',
+  summary: 'Name the day a stage of a contract is planned for, or the one it was reached on; or none',
   method: 'put',
   path: '/api/jobs/:jobId/stage-days',
   callers: ['owner', 'estimator', 'office'],
   params: oneJob,
-  body: z.strictObject({ issueId: identifier, claim: stageClaimSchema, plannedOn: day.nullable() }),
+  body: z.strictObject({
+    issueId: identifier,
+    claim: stageClaimSchema,
+    of: z.enum(['planned', 'reached']),
+    day: day.nullable(),
+  }),
   answers: {},
 });

@@ -16,8 +16,9 @@ export const dueStageSchema = z.strictObject({
   title: z.string(),
   claim: stageClaimSchema,
   name: z.string(),
-  /** The day it is planned for, of a deposit the day of acceptance; null for what waits for its milestone or share of the work. */
+  /** The day it was reached on, else planned for, of a deposit the day of acceptance; null for what waits for its milestone or share of the work. */
   dueOn: z.string().nullable(),
+  isReached: z.boolean(),
   currency: z.string(),
   net_minor: z.int(),
   gross_minor: z.int(),

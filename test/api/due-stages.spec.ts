@@ -1,4 +1,9 @@
-import { planStage } from '#shared/invoices/contract-account-endpoints';
+import { listHistory } from '#shared/audit/history-endpoints';
+import {
+  nameStageDay,
+  readContractAccount,
+  type ContractAccountAnswer,
+} from '#shared/invoices/contract-account-endpoints';
 import { listDueStages, type DueStage } from '#shared/invoices/due-stages-endpoints';
 import { acceptedIssue } from './sample-client-visit';
 import { sayWho, stageInvoice } from './sample-invoice';
@@ -28,8 +33,8 @@ describe('What can be invoiced', () => {
       await acceptedIssue(api.ours, api),
       await acceptedIssue(api.ours, api),
     ];
-    const plan = (jobId: string, claim: DueStage['claim'], plannedOn: string, issueId: string) =>
-      api.as('office').call(planStage, { params: { jobId }, body: { issueId, claim, plannedOn } });
+    const plan = (jobId: string, claim: DueStage['claim'], day: string, issueId: string) =>
+      api.as('office').call(nameStageDay, { params: { jobId }, body: { issueId, claim, of: 'planned', day } });
     for (const [{ jobId, issueId }, day] of [
       [later, '2031-05-01'],
       [sooner, '2031-04-01'],
@@ -55,6 +60,68 @@ describe('What can be invoiced', () => {
     } while (cursor !== null);
     expect(paged).toEqual(items);
     expect(count).toBe(items.length);
+  });
+
+  describe('of a stage that waits for its milestone', () => {
+    const name = (
+      { jobId, issueId }: { readonly jobId: string; readonly issueId: string },
+      of: 'planned' | 'reached',
+      { day, claim = whole }: { readonly day: string | null; readonly claim?: DueStage['claim'] },
+    ) => api.as('office').call(nameStageDay, { params: { jobId }, body: { issueId, claim, of, day } });
+    /** The stage with which all work is done. */
+    const isLast = ({ claim }: Pick<DueStage, 'claim'>) => claim.of === 'work' && claim.to_percent === '100';
+    const workOf = async (issueId: string) =>
+      (await list({ limit: 100 })).items.find((one) => one.issueId === issueId && isLast(one));
+    const daysOf = async (jobId: string) => {
+      const { body } = await api.as('office').call(readContractAccount, { params: { jobId } });
+      const { contract } = body as { contract: ContractAccountAnswer };
+      const next = contract.parts[0].next.find(isLast);
+      return [next?.plannedOn, next?.reachedOn];
+    };
+
+    it('is due from the day it was reached on, whatever was planned, and waits again when that is taken back', async () => {
+      const sample = await acceptedIssue(api.ours, api);
+      expect(await workOf(sample.issueId)).toMatchObject({ dueOn: null, isReached: false });
+      await name(sample, 'planned', { day: '2031-04-01' });
+      const today = api.clock.now().toISOString().slice(0, 10);
+      expect((await name(sample, 'reached', { day: today })).status).toBe(204);
+      expect(await workOf(sample.issueId)).toMatchObject({ dueOn: today, isReached: true });
+      expect(await daysOf(sample.jobId)).toEqual(['2031-04-01', today]);
+      await name(sample, 'reached', { day: null });
+      expect(await workOf(sample.issueId)).toMatchObject({ dueOn: '2031-04-01', isReached: false });
+      await name(sample, 'planned', { day: null });
+      expect(await workOf(sample.issueId)).toMatchObject({ dueOn: null, isReached: false });
+    });
+
+    it('keeps its days for what is left when a share of it is invoiced', async () => {
+      const sample = await acceptedIssue(api.ours, api);
+      await name(sample, 'reached', { day: '2026-01-05' });
+      await stageInvoice(api.ours, sample, { ...whole, to_percent: '90' });
+      expect(await workOf(sample.issueId)).toMatchObject({
+        ...{ dueOn: '2026-01-05', isReached: true },
+        claim: { of: 'work', from_percent: '90', to_percent: '100' },
+      });
+    });
+
+    it('is told in the history of the job by its name and day', async () => {
+      const sample = await acceptedIssue(api.ours, api);
+      await name(sample, 'reached', { day: '2026-01-05' });
+      await name(sample, 'reached', { day: null });
+      const { body } = await api.as('owner').call(listHistory, { query: { jobId: sample.jobId } });
+      const { items } = body as { items: { code: string; values: Record<string, string> }[] };
+      expect(items.slice(0, 2).map(({ code }) => code)).toEqual(['history-stage-not-reached', 'history-stage-reached']);
+      expect(items[1].values).toMatchObject({ day: '2026-01-05' });
+    });
+
+    it('is not reached in the future, and what waits for nothing is not reached at all', async () => {
+      const sample = await acceptedIssue(api.ours, api);
+      const late = await name(sample, 'reached', { day: '2099-01-01' });
+      expect(late.status).toBe(400);
+      expect(JSON.stringify(late.body)).toContain('The day lies in the future.');
+      const deposit = await name(sample, 'reached', { day: '2026-01-05', claim: { of: 'deposit' } });
+      expect(deposit.status).toBe(409);
+      expect(await daysOf(sample.jobId)).toEqual([null, null]);
+    });
   });
 
   it('is so no more once it is invoiced', async () => {

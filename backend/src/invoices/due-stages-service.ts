@@ -7,7 +7,7 @@ import { countLimit, type Page, type PageAsked } from '../platform/database/work
 import { ClaimReading } from './claim-reading';
 import type { InvoiceRepository } from './invoice-repository';
 import type { StageDayRepository } from './stage-day-repository';
-import { claimKey } from './stage-service';
+import { daysOfClaims, type StageDays } from './stage-days';
 
 /** Contracts of a workshop as far as `isOpen` says of a part, by its gross amount, that something of it may be left. */
 export type OpenContracts = (
@@ -25,24 +25,25 @@ interface Parts {
 interface Facts {
   readonly jobs: ReadonlyMap<string, NamedJobRow>;
   readonly claims: readonly ClaimingInvoice[];
-  readonly plannedOn: (issueId: string, key: string) => string | undefined;
+  readonly daysOf: ReturnType<typeof daysOfClaims>;
 }
 
 type Listed = DueStage & { readonly key: string };
 type ListedPart = Pick<Contract, 'currency'> & { readonly part: ContractPart };
 
-/** A deposit falls due on acceptance; everything else on its planned day, or when its milestone or share of the work is reached. */
-const dueOn = ({ claim }: NextClaim, part: ContractPart, planned: string | undefined): string | null =>
-  planned ?? (claim.of === 'deposit' ? part.acceptedOn : null);
+/** A deposit falls due on acceptance; everything else when it was reached, and until then on its planned day. */
+const dueOn = ({ claim }: NextClaim, part: ContractPart, { plannedOn, reachedOn }: StageDays): string | null =>
+  reachedOn ?? plannedOn ?? (claim.of === 'deposit' ? part.acceptedOn : null);
 
 function listed(job: NamedJobRow, { part, currency }: ListedPart, facts: Facts): Listed[] {
   const { issueId, kind, number, title, acceptedOn } = part;
   return partAccount(part, facts.claims).next.map((next, place) => {
-    const day = dueOn(next, part, facts.plannedOn(issueId, claimKey(next.claim)));
+    const days = facts.daysOf(part, next.claim);
+    const day = dueOn(next, part, days);
     return {
       ...{ jobId: job.id, jobNumber: jobNumber(job), jobTitle: job.title },
       ...{ clientId: job.clientId, clientName: job.clientName },
-      ...{ issueId, kind, number, title, currency, dueOn: day },
+      ...{ issueId, kind, number, title, currency, dueOn: day, isReached: days.reachedOn !== null },
       ...next,
       // What has no day stands at the end, in the order it was agreed.
       key: [day ?? '9999-12-31', acceptedOn, issueId, String(place).padStart(3, '0')].join(' '),
@@ -84,10 +85,6 @@ export class DueStagesService {
     const jobs = await this.parts.jobs.several(workshopId, jobIds);
     const claims = await new ClaimReading(this.parts.invoices).ofJobs(workshopId, jobIds);
     const days = await this.parts.days.ofIssues(workshopId, issueIds);
-    const byKey = new Map(days.map((day) => [`${day.issueId} ${day.claimKey}`, day.plannedOn]));
-    return {
-      ...{ claims, jobs: new Map(jobs.map((job) => [job.id, job])) },
-      plannedOn: (issueId, key) => byKey.get(`${issueId} ${key}`),
-    };
+    return { claims, jobs: new Map(jobs.map((job) => [job.id, job])), daysOf: daysOfClaims(days) };
   }
 }

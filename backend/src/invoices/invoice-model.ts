@@ -48,11 +48,12 @@ export interface InvoiceSettingsRow extends VersionedRow {
   readonly content: InvoiceSettings | null;
 }
 
-/** The day a stage is planned for. */
+/** The day a stage is planned for, and the one it was reached on; one of them at least. */
 export interface StageDayRow extends WorkshopRow {
   readonly issueId: string;
   readonly claimKey: string;
-  readonly plannedOn: string;
+  readonly plannedOn: string | null;
+  readonly reachedOn: string | null;
 }
 
 const issuedColumns = {
@@ -109,4 +110,5 @@ export const stageDayTable = (database: Database) =>
     issueId: column.reference,
     claimKey: column.word,
     plannedOn: column.day,
+    reachedOn: column.day,
   });

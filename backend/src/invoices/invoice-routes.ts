@@ -1,4 +1,4 @@
-import { beginStageInvoice, planStage, readContractAccount } from '#shared/invoices/contract-account-endpoints';
+import { beginStageInvoice, nameStageDay, readContractAccount } from '#shared/invoices/contract-account-endpoints';
 import { listDueStages } from '#shared/invoices/due-stages-endpoints';
 import {
   beginCreditNote,
@@ -63,5 +63,5 @@ export const invoiceRoutes = ({ drafts, stages, due, issuing, reading, settings,
   mount(beginStageInvoice, async ({ actor, params, body }) =>
     reading.read(await stages.begin(actor, params.jobId, body)),
   ),
-  mount(planStage, ({ actor, params, body }) => stages.plan(actor, params.jobId, body)),
+  mount(nameStageDay, ({ actor, params, body }) => stages.nameDay(actor, params.jobId, body)),
 ];

@@ -6,7 +6,7 @@ import { D } from '#shared/money/decimal';
 import type { PaperWords } from '../documents';
 
 /** The name of the planned stage that a claim is the whole of, if there is one. */
-function plannedName(part: ContractPart, claim: PlannedClaim): string | undefined {
+export function plannedName(part: ContractPart, claim: PlannedClaim): string | undefined {
   if (claim.of !== 'work') return undefined;
   const reached = cumulativePercents(part.plan.stages_percent);
   const place = reached.findIndex((end) => end.equals(claim.to_percent));

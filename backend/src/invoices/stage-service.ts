@@ -13,9 +13,11 @@ import { Rejection } from '#shared/problems/rejection';
 import { ClaimReading } from './claim-reading';
 import type { DraftService } from './draft-service';
 import type { InvoiceRow } from './invoice-model';
-import type { InvoiceParts } from './invoice-parts';
+import { todayIn, type InvoiceParts } from './invoice-parts';
 import { writtenOffOf } from './settling-service';
 import type { StageDayRepository } from './stage-day-repository';
+import { daysOfClaims, stageDayKey } from './stage-days';
+import { mustBeReachable, reachedDeed, type StageDayAsked } from './stage-reached';
 import { StageDrafts, type Claimed } from './stage-drafts';
 
 interface Parts extends InvoiceParts {
@@ -33,13 +35,6 @@ export interface StageAsked {
 const spanOf = (claim: StageClaim): WorkSpan[] =>
   claim.of === 'work' ? [{ from: new D(claim.from_percent), to: new D(claim.to_percent) }] : [];
 
-/** The same claim is the same text, however its percentages were written. */
-export const claimKey = (claim: StageClaim): string => {
-  if (claim.of === 'again') return `again ${claim.invoiceId}`;
-  if (claim.of !== 'work') return claim.of;
-  return `work ${new D(claim.from_percent).toString()} ${new D(claim.to_percent).toString()}`;
-};
-
 /** Invoices out of a contract: what may be invoiced next, and the drafts of deposits, stages, valuations and releases. */
 export class StageService {
   constructor(private readonly parts: Parts) {}
@@ -53,8 +48,7 @@ export class StageService {
       workshopId,
       contract.parts.map(({ issueId }) => issueId),
     );
-    const dayOf = (issueId: string, claim: StageClaim) =>
-      days.find((day) => day.issueId === issueId && day.claimKey === claimKey(claim))?.plannedOn ?? null;
+    const daysOf = daysOfClaims(days);
     const parts = contract.parts.map((part, place) => ({
       ...{
         issueId: part.issueId,
@@ -65,7 +59,7 @@ export class StageService {
       },
       ...{ net_minor: part.net_minor, gross_minor: part.gross_minor },
       ...account.parts[place],
-      next: account.parts[place].next.map((next) => ({ ...next, plannedOn: dayOf(part.issueId, next.claim) })),
+      next: account.parts[place].next.map((next) => ({ ...next, ...daysOf(part, next.claim) })),
     }));
     return { ...account, currency: contract.currency, parts };
   }
@@ -93,17 +87,18 @@ export class StageService {
     return claimRounding(part, claim);
   }
 
-  async plan(
-    actor: Actor,
-    jobId: string,
-    asked: Omit<StageAsked, 'invoiceId'> & { plannedOn: string | null },
-  ): Promise<void> {
+  /** Names the day a stage is planned for, or the one it was reached on; the other stays as it is. */
+  async nameDay(actor: Actor, jobId: string, asked: StageDayAsked): Promise<void> {
     const { workshopId } = actor;
+    const { issueId, claim, of, day } = asked;
     await this.parts.jobs.job(workshopId, jobId);
-    await this.partOf(workshopId, jobId, asked.issueId);
-    await this.parts.days.put(workshopId, { ...asked, id: newId(), claimKey: claimKey(asked.claim) });
-    const subject = { kind: 'job', id: jobId };
-    await this.parts.audit.record(actor, { subject, jobId, code: 'history-stage-planned', after: asked });
+    const { part } = await this.partOf(workshopId, jobId, issueId);
+    if (of === 'reached') mustBeReachable(part, asked, await todayIn(this.parts, workshopId));
+    const kept = daysOfClaims(await this.parts.days.ofIssues(workshopId, [issueId]))(part, claim);
+    const days = of === 'planned' ? { ...kept, plannedOn: day } : { ...kept, reachedOn: day };
+    await this.parts.days.put(workshopId, { ...days, issueId, id: newId(), claimKey: stageDayKey(part, claim) });
+    const told = of === 'planned' ? { code: 'history-stage-planned' as const } : reachedDeed(part, asked);
+    await this.parts.audit.record(actor, { subject: { kind: 'job', id: jobId }, jobId, after: asked, ...told });
   }
 
   private claims(workshopId: string, jobId: string): Promise<ClaimingInvoice[]> {

@@ -99,7 +99,13 @@ export const invoices = {
   'history-reminded': 'Reminded {client} of invoice {number}.',
   'history-statement-sent': 'Sent {client} a statement to {email}.',
   'history-checkout-begun': 'Payment of invoice {number} by card was begun.',
+  'invoice-stage-waits-for-nothing': 'This waits for nothing: it can be invoiced or credited at any time.',
+  'invoice-reached-late': 'The day lies in the future. Plan it for that day instead.',
   'history-stage-planned': 'Planned a stage of payment.',
+  'history-stage-reached':
+    '{stage, select, first {The first half of what was held back fell due} second {The second half of what was held back fell due} whole {The work was done} other {“{name}” was reached}} on {day}.',
+  'history-stage-not-reached':
+    '{stage, select, first {The first half of what was held back has not fallen due} second {The second half of what was held back has not fallen due} whole {The work was not done} other {“{name}” was not reached}} after all.',
 
   // Lines of stages
   'invoice-line-deposit': 'Deposit on {number}, {title}',

@@ -106,10 +106,10 @@ export const invoicesRows: MatrixRows = {
     },
     history: 'history-invoice-begun',
   },
-  planStage: {
+  nameStageDay: {
     prepare: async (workshop, api) => {
       const { jobId, issueId } = await oneContract(workshop, api);
-      return { params: { jobId }, body: { issueId, claim, plannedOn: '2027-02-01' } };
+      return { params: { jobId }, body: { issueId, claim, of: 'planned', day: '2027-02-01' } };
     },
     history: 'history-stage-planned',
   },

@@ -11,7 +11,7 @@ import { InvoiceCalls } from './invoice-calls';
 import { StageDrafting } from './stage-drafting';
 import { workshopToday } from './workshop-today';
 
-/** What can be invoiced across all jobs: what has a day by its day, then what waits for a milestone or for its share of the work. */
+/** What can be invoiced across all jobs: what was reached or has a day by that day, then what waits for a milestone or for its share of the work. */
 @Component({
   selector: 'app-due-stages-page',
   imports: [EmptyState, ListBody, MatButton, RouterLink],
@@ -44,8 +44,13 @@ export class DueStagesPage {
   }
 
   private whenOf(stage: DueStage): string {
+    if (stage.isReached && stage.dueOn !== null) return this.reached(stage, this.formats.day(stage.dueOn));
     if (stage.dueOn !== null) return this.formats.day(stage.dueOn);
     if (stage.gross_minor < 0 || stage.claim.of === 'again') return $localize`at any time`;
     return stage.claim.of === 'work' ? $localize`when it is reached` : $localize`when it is due back`;
+  }
+
+  private reached({ claim }: DueStage, day: string): string {
+    return claim.of === 'work' ? $localize`reached ${day}:day:` : $localize`due back ${day}:day:`;
   }
 }

@@ -1,5 +1,5 @@
 import { Injectable, inject } from '@angular/core';
-import { beginStageInvoice, planStage, readContractAccount } from '#shared/invoices/contract-account-endpoints';
+import { beginStageInvoice, nameStageDay, readContractAccount } from '#shared/invoices/contract-account-endpoints';
 import { listDueStages } from '#shared/invoices/due-stages-endpoints';
 import type { InvoiceContent, InvoiceKind } from '#shared/invoices/invoice';
 import type { InvoiceState } from '#shared/invoices/invoice-schema';
@@ -147,10 +147,10 @@ export class InvoiceCalls {
     return this.api.call(beginStageInvoice, { params: { jobId }, body });
   }
 
-  async planStage(
+  async nameStageDay(
     jobId: string,
-    body: { issueId: string; claim: StageClaim; plannedOn: string | null },
+    body: { issueId: string; claim: StageClaim; of: 'planned' | 'reached'; day: string | null },
   ): Promise<void> {
-    await this.api.call(planStage, { params: { jobId }, body });
+    await this.api.call(nameStageDay, { params: { jobId }, body });
   }
 }

@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { Router } from '@angular/router';
 import type { ContractAccountAnswer } from '#shared/invoices/contract-account-endpoints';
+import { Notices } from '../core/problems/notices';
 import { BooksVisit, invoiceId, pageOf, sampleDraft, sampleSummary } from '../../test/sample-invoices';
 import { JobInvoices } from './job-invoices';
 
@@ -21,8 +22,22 @@ const contract: ContractAccountAnswer = {
       ...{ net_minor: 1_000_00, gross_minor: 1_230_00, invoiced_minor: 400_00, credited_minor: 50_00 },
       ...{ left_minor: 880_00, isComplete: false },
       next: [
-        { claim: { of: 'deposit' }, name: '', plannedOn: null, net_minor: 300_00, gross_minor: 369_00 },
-        { claim: work, name: 'Delivered', plannedOn: '2026-07-01', net_minor: 415_45, gross_minor: 511_00 },
+        {
+          claim: { of: 'deposit' },
+          name: '',
+          plannedOn: null,
+          reachedOn: null,
+          net_minor: 300_00,
+          gross_minor: 369_00,
+        },
+        {
+          claim: work,
+          name: 'Delivered',
+          plannedOn: '2026-07-01',
+          reachedOn: null,
+          net_minor: 415_45,
+          gross_minor: 511_00,
+        },
       ],
     },
   ],
@@ -53,7 +68,7 @@ describe('JobInvoices', () => {
     for (const text of ['€1,230.00', '€400.00', '€50.00', '€880.00', 'Deposit', '€369.00', 'Delivered', '€511.00'])
       expect(visit.text).toContain(text);
     expect([...visit.element.querySelectorAll<HTMLInputElement>('input[type=date]')].map(({ value }) => value)).toEqual(
-      ['', '2026-07-01'],
+      ['', '2026-07-01', ''],
     );
   });
 
@@ -87,6 +102,35 @@ describe('JobInvoices', () => {
     expect(claim).toEqual({ of: 'work', from_percent: '40', to_percent: '62.5' });
   });
 
+  it('names the day a stage was reached on, takes it back, and says why it is refused', async () => {
+    const days = `/api/jobs/${job.id}/stage-days`;
+    const visit = await begin();
+    const enter = async (day: string) => {
+      const entry = [...visit.element.querySelectorAll<HTMLInputElement>('input[type=date]')][2];
+      entry.value = day;
+      entry.dispatchEvent(new Event('change'));
+      await visit.settle();
+      return visit.request('PUT', days);
+    };
+    const first = await enter('2026-05-06');
+    expect(first.request.body).toEqual({ issueId, claim: work, of: 'reached', day: '2026-05-06' });
+    first.flush(null);
+    await visit.settle();
+    await visit.answer('GET', account, { contract });
+    const second = await enter('');
+    expect(second.request.body).toMatchObject({ of: 'reached', day: null });
+    const errors = [{ path: ['body', 'day'], message: 'The day lies in the future.' }];
+    const problem = { type: 'urn:problem:problem-invalid', title: 'Wrong.', status: 400, instance: '', errors };
+    second.flush(problem, { status: 400, statusText: 'Bad Request' });
+    await visit.settle();
+    expect(
+      TestBed.inject(Notices)
+        .current()
+        .map(({ text }) => text),
+    ).toEqual(['The day lies in the future.']);
+    await visit.answer('GET', account, { contract });
+  });
+
   const shown = async (part: Partial<ContractAccountAnswer['parts'][number]>) => {
     const visit = await BooksVisit.begin(TestJob, { path: 'job', address: '/job', roles: ['office'] });
     const sums = { invoiced_minor: 1_230_00, credited_minor: 50_00, left_minor: 50_00 };
@@ -98,7 +142,7 @@ describe('JobInvoices', () => {
 
   it('offers again what was credited of an invoice that stands', async () => {
     const claim = { of: 'again', invoiceId: issueId } as const;
-    const next = { claim, name: '2026-0007', plannedOn: null, net_minor: 40_65, gross_minor: 50_00 };
+    const next = { claim, name: '2026-0007', plannedOn: null, reachedOn: null, net_minor: 40_65, gross_minor: 50_00 };
     const visit = await shown({ next: [next] });
     expect(visit.text).not.toContain('All of it is invoiced.');
     await visit.press('Draft the invoice, Again, what was credited of 2026-0007');
@@ -107,7 +151,7 @@ describe('JobInvoices', () => {
 
   it('offers what a variation takes away as a credit note, and no share of it', async () => {
     const claim = { of: 'work', from_percent: '0', to_percent: '100' } as const;
-    const next = { claim, name: '', plannedOn: null, net_minor: -350_00, gross_minor: -420_00 };
+    const next = { claim, name: '', plannedOn: null, reachedOn: null, net_minor: -350_00, gross_minor: -420_00 };
     const visit = await shown({ kind: 'variation', gross_minor: -420_00, next: [next] });
     expect(visit.text).toContain('−€420.00');
     expect(visit.button('Invoice by the share that is done')).toBeUndefined();
@@ -123,6 +167,6 @@ describe('JobInvoices', () => {
   it('lets the estimator plan and draft nothing', async () => {
     const visit = await begin(['estimator']);
     expect(visit.element.querySelectorAll('button')).toHaveLength(0);
-    expect(visit.element.querySelectorAll('input[type=date]')).toHaveLength(2);
+    expect(visit.element.querySelectorAll('input[type=date]')).toHaveLength(3);
   });
 });

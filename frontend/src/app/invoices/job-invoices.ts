@@ -8,9 +8,10 @@ import { Formats } from '../core/formats/formats';
 import { Notices } from '../core/problems/notices';
 import { ProblemError } from '../core/problems/problem-error';
 import { Session } from '../core/session/session';
-import { claimName } from './claim-names';
+import { claimName, mayBeReached } from './claim-names';
 import { InvoiceCalls } from './invoice-calls';
 import { invoiceKindNames } from './invoice-names';
+import { StageDays, type NamedDay } from './stage-days';
 import { StageDrafting } from './stage-drafting';
 import { StandingMark } from './standing-mark';
 import { ValuationForm } from './valuation-form';
@@ -20,7 +21,7 @@ type Part = ContractAccountAnswer['parts'][number];
 /** What of a job's contract is invoiced and left, what may be invoiced next, and every invoice of the job. */
 @Component({
   selector: 'app-job-invoices',
-  imports: [MatButton, RouterLink, StandingMark, ValuationForm],
+  imports: [MatButton, RouterLink, StageDays, StandingMark, ValuationForm],
   changeDetection: ChangeDetectionStrategy.OnPush,
   providers: [StageDrafting],
   templateUrl: './job-invoices.html',
@@ -63,7 +64,11 @@ export class JobInvoices {
   protected readonly parts = computed(() =>
     (this.contract()?.parts ?? []).map((part) => ({
       ...part,
-      next: part.next.map((next) => ({ ...next, title: claimName(next, this.formats) })),
+      next: part.next.map((next) => ({
+        ...next,
+        title: claimName(next, this.formats),
+        mayBeReached: mayBeReached(next),
+      })),
       // What is taken away is credited as far as an invoice has room for it, whatever share of it that is.
       firstWork: part.gross_minor < 0 ? undefined : part.next.find(({ claim }) => claim.of === 'work')?.claim,
     })),
@@ -82,12 +87,14 @@ export class JobInvoices {
     this.listReading.reload();
   }
 
-  protected async plan({ issueId }: Pick<Part, 'issueId'>, claim: StageClaim, day: string): Promise<void> {
+  protected async nameDay({ issueId }: Pick<Part, 'issueId'>, claim: StageClaim, named: NamedDay): Promise<void> {
+    const day = named.day === '' ? null : named.day;
     try {
-      await this.calls.planStage(this.job().id, { issueId, claim, plannedOn: day === '' ? null : day });
+      await this.calls.nameStageDay(this.job().id, { issueId, claim, of: named.of, day });
     } catch (error) {
       if (!(error instanceof ProblemError)) throw error;
-      this.notices.complain(error.message);
+      const [complaint] = error.problem.errors;
+      this.notices.complain(complaint?.message ?? error.message);
     }
     this.contractReading.reload();
   }

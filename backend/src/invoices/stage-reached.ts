@@ -1,0 +1,38 @@
+import type { ContractPart } from '#shared/agreements/contract';
+import type { StageClaim } from '#shared/invoices/stage-claim';
+import { Rejection } from '#shared/problems/rejection';
+import { plannedName } from './stage-names';
+import { stageOfClaim } from '#shared/invoices/stage-of-claim';
+
+/** Which day of a stage is named, or taken back. */
+export interface StageDayAsked {
+  readonly issueId: string;
+  readonly claim: StageClaim;
+  readonly of: 'planned' | 'reached';
+  readonly day: string | null;
+}
+
+/** What waits for a milestone is reached, or comes to be released; a deposit falls due on acceptance, and what is credited at any time. */
+export function mustBeReachable({ gross_minor }: ContractPart, { claim, day }: StageDayAsked, today: string): void {
+  const waits = gross_minor > 0 && claim.of !== 'deposit' && claim.of !== 'again';
+  if (!waits) throw new Rejection('conflict', 'invoice-stage-waits-for-nothing');
+  if (day === null || day <= today) return;
+  const complaints = [{ path: ['body', 'day'], code: 'invoice-reached-late' as const, values: {} }];
+  throw new Rejection('invalid', 'problem-invalid', { complaints });
+}
+
+function told(part: ContractPart, asked: StageClaim): { stage: string; name: string } {
+  if (asked.of === 'first-release') return { stage: 'first', name: '' };
+  if (asked.of === 'second-release') return { stage: 'second', name: '' };
+  const claim = stageOfClaim(part, asked);
+  const name = claim.of === 'work' ? plannedName(part, claim) : '';
+  return name ? { stage: 'named', name } : { stage: 'whole', name: '' };
+}
+
+/** How the history tells that a stage was reached, or was not after all. */
+export function reachedDeed(part: ContractPart, { claim, day }: StageDayAsked) {
+  const values = told(part, claim);
+  return day === null
+    ? ({ code: 'history-stage-not-reached', values } as const)
+    : ({ code: 'history-stage-reached', values: { ...values, day } } as const);
+}
