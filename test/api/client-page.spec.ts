@@ -279,23 +279,30 @@ describe('The page of an issue', () => {
     expect(crate.difference_minor).toBe(21_600);
   });
 
-  it('follows a choice with lines and totals that add up', async () => {
+  it('prices every combination there is with lines and totals that add up, one alternative alone as it is offered', async () => {
     const sample = await sampleChoices(api.ours, api);
+    const { oil, silver, crate } = sample;
     const visitor = await clientOf(api.ours, api, sample.issueId);
     const priced = async (choice: string[]) =>
       (await visitor.call(priceClientChoice, { params: { issueId: sample.issueId }, body: { choice } }))
         .body as ClientPrice;
-    const base = await priced([]);
-    const both = await priced([sample.crate, sample.oil]);
-    const oil = await priced([sample.oil]);
-    expect(both.gross_minor - oil.gross_minor).toBe(21_600);
-    expect(both.choice).toEqual([sample.oil, sample.crate]);
-    for (const price of [base, both, oil]) {
+    const { alternatives, price: base } = await pageOf(visitor, sample.issueId);
+    const grossOf = new Map<string, number>();
+    for (const choice of [[], [oil], [silver], [crate], [crate, oil], [crate, silver]]) {
+      const price = await priced(choice);
+      const inOrder = [oil, silver, crate].filter((id) => choice.includes(id));
+      expect(price.choice).toEqual(inOrder);
+      expect(await priced(inOrder)).toEqual(price);
       const lines = price.lines.reduce((sum, { price_minor }) => sum + price_minor, 0);
       expect(lines - price.discount_minor).toBe(price.net_minor);
       expect(price.net_minor + price.tax_minor).toBe(price.gross_minor);
       expect(price.payments.reduce((sum, { paid_minor }) => sum + paid_minor, 0)).toBe(price.gross_minor);
+      grossOf.set(inOrder.join(' '), price.gross_minor);
     }
+    expect(grossOf.get('')).toBe(base.gross_minor);
+    for (const { id, gross_minor } of alternatives) expect(grossOf.get(id)).toBe(gross_minor);
+    for (const gilding of [oil, silver])
+      expect((grossOf.get(`${gilding} ${crate}`) ?? 0) - (grossOf.get(gilding) ?? 0)).toBe(21_600);
   });
 
   it.each([
