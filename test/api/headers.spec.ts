@@ -21,6 +21,7 @@ const get = (path: string) => request(api.app.web.express).get(path);
 describe.each([
   '/',
   '/jobs',
+  '/client',
   '/main-ABCDEFGH.js',
   '/api/session',
   '/api/people',
@@ -35,6 +36,7 @@ describe.each([
       'x-content-type-options': 'nosniff',
       'referrer-policy': 'no-referrer',
       'x-frame-options': 'DENY',
+      'x-robots-tag': 'noindex, nofollow',
       'strict-transport-security': 'max-age=31536000; includeSubDomains',
     });
     expect(headers['content-security-policy']).toMatch(/frame-ancestors 'none'/);

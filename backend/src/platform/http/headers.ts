@@ -26,14 +26,18 @@ export const plainPolicy = [
   "frame-ancestors 'none'",
 ].join('; ');
 
-/** The headers of every answer; what is not a page may do nothing at all in a browser. */
-export const safetyHeaders = (): RequestHandler =>
-  helmet({
-    contentSecurityPolicy: {
-      useDefaults: false,
-      directives: { defaultSrc: ["'none'"], frameAncestors: ["'none'"], baseUri: ["'none'"] },
-    },
-    strictTransportSecurity: { maxAge: 31_536_000, includeSubDomains: true },
-    referrerPolicy: { policy: 'no-referrer' },
-    frameguard: { action: 'deny' },
-  });
+const refusals = helmet({
+  contentSecurityPolicy: {
+    useDefaults: false,
+    directives: { defaultSrc: ["'none'"], frameAncestors: ["'none'"], baseUri: ["'none'"] },
+  },
+  strictTransportSecurity: { maxAge: 31_536_000, includeSubDomains: true },
+  referrerPolicy: { policy: 'no-referrer' },
+  frameguard: { action: 'deny' },
+});
+
+/** The headers of every answer; what is not a page may do nothing at all in a browser, and nothing is for a search engine. */
+export const safetyHeaders = (): RequestHandler => (request, response, next) => {
+  response.setHeader('X-Robots-Tag', 'noindex, nofollow');
+  refusals(request, response, next);
+};
