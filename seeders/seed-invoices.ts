@@ -21,7 +21,7 @@ function invoicesOfThen(app: App, platform: Platform): Invoices {
 
 async function sayWho({ invoices }: App, owner: Actor): Promise<void> {
   const settings = startInvoiceSettings(demonstrationSettings);
-  const account = { name: demonstrationSettings.name, iban: 'IE29AIBK93115212345678', bic: 'AIBKIE2D' };
+  const account = { name: demonstrationSettings.name, iban: 'IE61HXLN93115212345678', bic: 'HXLNIE2D' };
   const closing = 'Goods stay ours until they are paid for.';
   await invoices.settings.keep(owner, 0, { ...settings, account, closing });
 }
