@@ -27,6 +27,11 @@ export interface LeafOfProduct {
 
 type Column = FigureColumn<LeafOfProduct>;
 
+function singly(booklets: number): string[] {
+  if (booklets === 0) return [];
+  return [booklets === 1 ? $localize`a single booklet` : $localize`${booklets}:booklets: single booklets`];
+}
+
 /** The leaf of a whole estimate, product by product: leaves, booklets, packs, how it covers, how much metal it is. */
 @Component({
   selector: 'app-leaf-totals',
@@ -47,6 +52,8 @@ export class LeafTotals {
   private readonly isSmall = smallScreen();
 
   readonly products = input.required<readonly LeafOfProduct[]>();
+
+  private readonly isInches = computed(() => this.formats.lengthUnit() === 'in');
 
   protected readonly idOf = (product: LeafOfProduct) => product.productId;
   protected readonly columns = computed<readonly Column[]>(() => [
@@ -80,10 +87,10 @@ export class LeafTotals {
       },
       {
         key: 'each',
-        heading: $localize`Leaves per m²`,
+        heading: this.isInches() ? $localize`Leaves per ft²` : $localize`Leaves per m²`,
         kind: 'figure',
-        text: ({ coverage }) => this.formats.number(coverage.leavesPerM2, 0),
-        minor: ({ coverage }) => $localize`${this.formats.number(coverage.leavesPerFt2, 1)}:leaves: per ft²`,
+        text: ({ coverage }) => this.leavesPer(coverage, this.isInches()),
+        minor: ({ coverage }) => this.perArea(coverage, !this.isInches()),
       },
       {
         key: 'metal',
@@ -92,6 +99,15 @@ export class LeafTotals {
         text: ({ mass_grams }) => this.formats.figure('grams', mass_grams),
       },
     ];
+  }
+
+  private leavesPer({ leavesPerFt2, leavesPerM2 }: LeafCoverage, isFoot: boolean): string {
+    return isFoot ? this.formats.number(leavesPerFt2, 1) : this.formats.number(leavesPerM2, 0);
+  }
+
+  private perArea(coverage: LeafCoverage, isFoot: boolean): string {
+    const leaves = this.leavesPer(coverage, isFoot);
+    return isFoot ? $localize`${leaves}:leaves: per ft²` : $localize`${leaves}:leaves: per m²`;
   }
 
   private cost(): Column[] {
@@ -110,7 +126,7 @@ export class LeafTotals {
     const { coverage, mass_grams } = row;
     const figures = [
       $localize`${this.formats.number(coverage.grossToNet, 2, 2)}:ratio: times the surface`,
-      $localize`${this.formats.number(coverage.leavesPerM2, 0)}:leaves: per m²`,
+      this.perArea(coverage, this.isInches()),
       this.formats.figure('grams', mass_grams),
     ];
     return [this.bought(row), ...(this.isSmall() ? figures : [])].filter(Boolean).join(' · ');
@@ -124,8 +140,7 @@ export class LeafTotals {
         ? $localize`a pack of ${booklets}:booklets:`
         : $localize`${count}:count: packs of ${booklets}:booklets:`,
     );
-    const singles = purchase.singles > 0 ? [$localize`${purchase.singles}:booklets: single booklets`] : [];
-    return [...packs, ...singles].join(', ');
+    return [...packs, ...singly(purchase.singles)].join(', ');
   }
 
   private explained({ productId, grossLeaves, reasons }: LeafOfProduct): Explained {
