@@ -29,7 +29,9 @@ import type { MemberForm } from '../members/member-form';
 
     @media (min-width: 1000px) {
       .particulars {
-        grid-template-columns: minmax(0, 1.8fr) minmax(0, 0.8fr) minmax(0, 1.6fr) minmax(0, 1.6fr);
+        grid-template-columns: minmax(0, 2.4fr) minmax(0, 0.8fr) minmax(0, 1.6fr);
+        grid-auto-columns: minmax(0, 1.6fr);
+        grid-auto-flow: column;
       }
 
       .name {
