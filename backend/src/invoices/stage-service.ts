@@ -17,7 +17,7 @@ import { todayIn, type InvoiceParts } from './invoice-parts';
 import { writtenOffOf } from './settling-service';
 import type { StageDayRepository } from './stage-day-repository';
 import { daysOfClaims, stageDayKey } from './stage-days';
-import { mustBeReachable, reachedDeed, type StageDayAsked } from './stage-reached';
+import { mustBeReachable, reachedDeed, type StageDayAsked } from './stage-day-asked';
 import { StageDrafts, type Claimed } from './stage-drafts';
 
 interface Parts extends InvoiceParts {

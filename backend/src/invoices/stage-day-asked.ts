@@ -1,8 +1,8 @@
 import type { ContractPart } from '#shared/agreements/contract';
 import type { StageClaim } from '#shared/invoices/stage-claim';
+import { stageOfClaim } from '#shared/invoices/stage-of-claim';
 import { Rejection } from '#shared/problems/rejection';
 import { plannedName } from './stage-names';
-import { stageOfClaim } from '#shared/invoices/stage-of-claim';
 
 /** Which day of a stage is named, or taken back. */
 export interface StageDayAsked {
