@@ -73,7 +73,7 @@ const asked = (more: Partial<Parameters<typeof benchDayOf>[1]> = {}) => ({
   ...more,
 });
 const mark = (taskId: string, start_minutes: number, end_minutes: number | null) => ({
-  ...{ taskId, left_minutes: 0, personIds: ['gina'] },
+  ...{ taskId, left_minutes: 0, leftAt: '2027-01-04T00:00:00.000Z', personIds: ['gina'] },
   startedAt: new Date(Date.UTC(2027, 0, 4) + start_minutes * 60_000).toISOString(),
   endedAt: end_minutes === null ? null : new Date(Date.UTC(2027, 0, 4) + end_minutes * 60_000).toISOString(),
 });

@@ -58,3 +58,6 @@ export const markSchema = z.strictObject({
   left_minutes: z.int().min(0).max(100_000).nullable(),
 });
 export type MarkEntry = z.infer<typeof markSchema>;
+
+/** Tasks that went as they were planned up to now. */
+export const asPlannedSchema = z.strictObject({ taskIds: z.array(programmeId).min(1).max(2000) });

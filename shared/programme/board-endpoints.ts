@@ -1,7 +1,7 @@
 import * as z from 'zod';
 import { endpoint, sameForAll, sameForPriced } from '#shared/actor/endpoint';
 import { identifier } from '#shared/problems/entry-schema';
-import { benchDaySchema, benchTaskSchema, markSchema } from '#shared/programme/bench-day-schema';
+import { asPlannedSchema, benchDaySchema, benchTaskSchema, markSchema } from '#shared/programme/bench-day-schema';
 import { boardSchema } from '#shared/programme/board-schema';
 import {
   feedEntrySchema,
@@ -43,6 +43,18 @@ export const markTask = endpoint({
   params: z.strictObject({ estimateId: identifier }),
   body: markSchema,
   answers: sameForAll(benchTaskSchema),
+});
+
+export const markAsPlanned = endpoint({
+  name: 'markAsPlanned',
+  summary:
+    'Say of tasks that they went as planned: begun and, where that is over, finished at their planned times; what is marked already or was not to begin yet stays as it is',
+  method: 'post',
+  path: '/api/estimates/:estimateId/programme/marks/as-planned',
+  callers: ['owner', 'estimator', 'bench'],
+  params: z.strictObject({ estimateId: identifier }),
+  body: asPlannedSchema,
+  answers: sameForAll(z.strictObject({ marked: z.int() })),
 });
 
 export const listFeeds = endpoint({

@@ -12,9 +12,10 @@ import {
 } from '#shared/programme/lag-progress';
 import { lagShift } from '#shared/programme/lag-shift';
 import { peopleSpans, shopSpans } from '#shared/programme/person-spans';
-import type { ProgrammeLag, ProgrammeRequest, ProgrammeTask } from '#shared/programme/programme-request';
+import type { Happened, ProgrammeLag, ProgrammeRequest, ProgrammeTask } from '#shared/programme/programme-request';
 import {
   taskNetwork,
+  type Crew,
   type NetworkArc,
   type NetworkTask,
   type Position,
@@ -58,6 +59,13 @@ function progressOf(
   };
 }
 
+/** A crew with what is left to it: the hours since that was said are worked, and what should be over by now ends at once. */
+function withWorkLeft(crew: Crew, { leftAt_minutes }: Happened, from: number): Crew {
+  if (leftAt_minutes === undefined) return crew;
+  const worked = Math.max(0, crew.spans.workedBy(from) - crew.spans.workedBy(leftAt_minutes));
+  return { ...crew, work: Math.max(1, crew.work - worked) };
+}
+
 /** Where a task stands that has happened or is being worked on. */
 function happenedPosition(task: ProgrammeTask, { start_minutes }: ProgrammeRequest, hours: CrewHours): Position | null {
   const { happened } = task;
@@ -67,8 +75,9 @@ function happenedPosition(task: ProgrammeTask, { start_minutes }: ProgrammeReque
     return { start: happened.start_minutes, end: happened.end_minutes, busyFrom: happened.start_minutes, crew };
   // What is left of it comes after its start, also where a plan is judged from an earlier moment.
   const from = Math.max(start_minutes, happened.start_minutes);
-  const rest = firstPosition({ isBreakable: true }, crew, { start: from, end: -Infinity });
-  return rest && { start: happened.start_minutes, end: rest.end, busyFrom: rest.start, crew };
+  const left = withWorkLeft(crew, happened, from);
+  const rest = firstPosition({ isBreakable: true }, left, { start: from, end: -Infinity });
+  return rest && { start: happened.start_minutes, end: rest.end, busyFrom: rest.start, crew: left };
 }
 
 const clash = (one: Position, other: Position): boolean =>

@@ -53,7 +53,8 @@ export interface TaskMark {
   readonly taskId: string;
   readonly startedAt: string;
   readonly endedAt: string | null;
-  /** Hands-on minutes still to do; 0 once it is finished. */
+  /** Hands-on minutes that were still to do at `leftAt`; 0 once it is finished. */
   readonly left_minutes: number;
+  readonly leftAt: string;
   readonly personIds: readonly string[];
 }

@@ -252,6 +252,7 @@ describe('What has happened', () => {
         startedAt: '2026-06-01T07:00:00.000Z',
         endedAt: '2026-06-02T09:30:00.000Z',
         left_minutes: 0,
+        leftAt: '2026-06-01T07:00:00.000Z',
         personIds: ['carver'],
       },
     ];
@@ -259,7 +260,7 @@ describe('What has happened', () => {
     const { tasks } = programmeFor([panel], { marks, inputs: { pins } }).request;
     // Dublin is an hour ahead of UTC in June: 07:00 UTC is 08:00, the 480th minute.
     expect(tasks.find(({ id }) => id === 'member/carving/carver')?.happened).toEqual({
-      ...{ start_minutes: 480, end_minutes: day + 630, left_minutes: 0, personIds: ['carver'] },
+      ...{ start_minutes: 480, end_minutes: day + 630, left_minutes: 0, leftAt_minutes: 480, personIds: ['carver'] },
     });
     expect(tasks.find(({ id }) => id.endsWith('burnish/1.1'))?.pinned_minutes).toBe(35 * day + 540);
   });
@@ -268,13 +269,14 @@ describe('What has happened', () => {
     const carving = programmeFor([panel]).items.filter(({ kind }) => kind === 'carving');
     const marks = carving.map(({ taskId, gradeId }, at) => ({
       ...{ taskId, startedAt: '2026-06-01T07:00:00.000Z', left_minutes: 0, personIds: [gradeId] },
+      leftAt: '2026-06-01T07:00:00.000Z',
       endedAt: `2026-06-0${String(2 + at)}T09:30:00.000Z`,
     }));
     // A fortnight later: two working days after the last of the carving are long over, and so is the fitting of the top.
     const { request } = programmeFor([panel], { marks, from_minutes: 14 * day + 8 * hour });
     const ended = (1 + (carving.length - 1)) * day + 630;
     expect(request.tasks.find(({ id }) => id === 'member/carved')?.happened).toEqual({
-      ...{ start_minutes: ended, end_minutes: ended, left_minutes: 0, personIds: [] },
+      ...{ start_minutes: ended, end_minutes: ended, left_minutes: 0, leftAt_minutes: ended, personIds: [] },
     });
     const plan = programme(request, { limit: { nodes: 1 } });
     expect(plan.tasks.find(({ taskId }) => taskId === `${water}/size-coat/1.1`)?.start_minutes).toBe(

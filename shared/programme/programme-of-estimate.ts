@@ -144,7 +144,9 @@ function stood(
   if (!mark) return { item, task: { ...task, pinned_minutes } };
   const start_minutes = minutesOf(mark.startedAt, frame);
   const end_minutes = mark.endedAt ? minutesOf(mark.endedAt, frame) : start_minutes;
-  const happened = { start_minutes, end_minutes, left_minutes: mark.left_minutes, personIds: mark.personIds };
+  const { left_minutes, personIds } = mark;
+  const leftAt_minutes = minutesOf(mark.leftAt, frame);
+  const happened = { start_minutes, end_minutes, left_minutes, leftAt_minutes, personIds };
   return { item, task: { ...task, pinned_minutes: null, happened } };
 }
 

@@ -2,11 +2,15 @@ import type { MomentSpan, Person, ShopCalendar } from '#shared/programme/shop-ca
 import type { SearchLimit } from '#shared/programme/project';
 import type { Programme } from '#shared/programme/programme-plan';
 
-/** Work that has begun: where it was done, by whom, and what is left of it in hands-on minutes (0: finished at `end_minutes`). */
+/**
+ * Work that has begun: where it was done, by whom, and what was left of it in hands-on minutes (0: finished at `end_minutes`) at a moment, since when it went
+ * on in its people's hours; without one it is left at the moment that is planned from.
+ */
 export interface Happened {
   readonly start_minutes: number;
   readonly end_minutes: number;
   readonly left_minutes: number;
+  readonly leftAt_minutes?: number;
   readonly personIds: readonly string[];
 }
 

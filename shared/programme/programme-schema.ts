@@ -136,6 +136,7 @@ export const taskMarkSchema = z.strictObject({
   startedAt: instant,
   endedAt: instant.nullable(),
   left_minutes: amount,
+  leftAt: instant,
   personIds: z.array(z.string()),
 }) satisfies z.ZodType<TaskMark>;
 
@@ -170,6 +171,8 @@ export const programmeSchema = z.strictObject({
   version: z.int().min(0),
   inputs: programmeInputsSchema,
   marks: z.array(taskMarkSchema),
+  /** Whether its job is accepted: then it is worked, and marked, at the bench. */
+  isAccepted: z.boolean(),
   ...programmeFrame,
   request: programmeRequestSchema,
   items: z.array(programmeItemSchema),

@@ -214,6 +214,19 @@ describe('A programme', () => {
     ]);
   });
 
+  it('takes it that work begun went on in working hours since it was said how much is left, and ends at once what should be over', () => {
+    const begun = { start_minutes: at(0, 9), end_minutes: at(0, 9), left_minutes: 600, personIds: ['gina'] };
+    const endFrom = (start_minutes: number, leftAt_minutes: number) => {
+      const tasks = [taskForSpecs('carve', { handsOn_minutes: 600, happened: { ...begun, leftAt_minutes } })];
+      return timesOf(programme(requestForSpecs({ start_minutes, tasks })), 'carve');
+    };
+    // Ten hours from nine: seven of them on the first day, without the pause at noon, and three on the next.
+    expect(endFrom(at(0, 14), at(0, 9))).toEqual([at(0, 9), at(1, 11)]);
+    expect(endFrom(at(1, 10), at(0, 9))).toEqual([at(0, 9), at(1, 11)]);
+    expect(endFrom(at(1, 10), at(1, 10))).toEqual([at(0, 9), at(2, 12)]);
+    expect(endFrom(at(3, 10), at(0, 9))).toEqual([at(0, 9), at(3, 10) + 1]);
+  });
+
   it('stands by a pin, and says when nobody can begin then', () => {
     const pinned = (pinned_minutes: number) =>
       programme(

@@ -6,7 +6,13 @@ import { unattendedMarks, type MarkedWork } from '#shared/programme/unattended-m
 const frame = programmeFrame('2027-01-04', 'UTC');
 const item = (taskId: string, handsOn_minutes: number) => ({ taskId, handsOn_minutes });
 const mark = (taskId: string, startedAt: string, endedAt: string | null): TaskMark => ({
-  ...{ taskId, startedAt: `2027-01-${startedAt}:00.000Z`, left_minutes: 0, personIds: ['carl'] },
+  ...{
+    taskId,
+    startedAt: `2027-01-${startedAt}:00.000Z`,
+    left_minutes: 0,
+    leftAt: '2027-01-04T08:00:00.000Z',
+    personIds: ['carl'],
+  },
   endedAt: endedAt && `2027-01-${endedAt}:00.000Z`,
 });
 

@@ -32,7 +32,7 @@ function unattendedMark(taskId: string, marks: Marks, work: MarkedWork): TaskMar
   const known = moments.filter((moment) => moment !== null);
   if (isHeld || known.length === 0 || known.length < moments.length) return null;
   const at = instantOf(Math.max(...known), work.frame);
-  return { taskId, startedAt: at, endedAt: at, left_minutes: 0, personIds: [] };
+  return { taskId, startedAt: at, endedAt: at, left_minutes: 0, leftAt: at, personIds: [] };
 }
 
 /**

@@ -3,6 +3,7 @@ import { v7 as newId } from 'uuid';
 import {
   listFeeds,
   makeFeed,
+  markAsPlanned,
   markTask,
   readBenchDay,
   readBoard,
@@ -15,6 +16,7 @@ import type { BoardAnswer } from '#shared/programme/board-schema';
 import { addDays } from '#shared/calendar/add-days';
 import { dayOfInstant } from '#shared/calendar/day-of-instant';
 import { startOfDay_ms } from '#shared/programme/odd-days';
+import { programme as planAgain } from '#shared/programme/programme';
 import { planDifferences } from '#shared/programme/plan-differences';
 import type { Programme } from '#shared/programme/programme-plan';
 import { readIssue } from '#shared/estimates/issues-endpoints';
@@ -529,7 +531,7 @@ describe('The bench', () => {
       const { plan } = await programmeOf(api.ours, estimateId);
       const planned = plan?.tasks.find((task) => task.taskId === taskId);
       const day = new Date(instant(programme, planned?.start_minutes ?? 0)).toISOString().slice(0, 10);
-      const query = { day, personId: planned?.personIds[0] };
+      const query = { day, personId: planned?.personIds[0] ?? '' };
       const read = await told<BenchDay>(owner, readBenchDay, { query });
       return read.tasks.find((task) => task.taskId === taskId)?.state;
     };
@@ -546,6 +548,38 @@ describe('The bench', () => {
     const { request } = await programmeOf(api.ours, estimateId);
     const carved = request.tasks.find(({ id }) => id.endsWith('/carved'));
     expect(carved?.happened).toMatchObject({ left_minutes: 0, personIds: [] });
+  });
+
+  test('says once of work nobody marked that it went as planned: then a plan that is made again leaves it where it was', async () => {
+    const { estimateId, programme: before } = await acceptedSample(api.ours, api, api.ours.people.bench);
+    expect(before.isAccepted).toBe(false);
+    const start = Math.min(...(before.plan?.tasks ?? []).map(({ start_minutes }) => start_minutes));
+    api.clock.stand(new Date(instant(before, start) + 4 * 1440 * 60_000));
+    for (const visitor of [owner, api.as('bench')]) await visitor.arrive();
+    expect((await owner.signIn(api.ours.people.owner.email, password)).status).toBe(200);
+    const unmarked = await programmeOf(api.ours, estimateId);
+    expect([unmarked.isAccepted, unmarked.isCurrent]).toEqual([true, true]);
+    const { plan, request } = unmarked;
+    const now = request.start_minutes;
+    const due = (plan?.tasks ?? []).filter((task) => task.start_minutes < now && task.personIds.length > 0);
+    const [first] = due;
+    const again = (answer: ProgrammeAnswer) =>
+      planAgain(answer.request, { previous: answer.plan as Programme }).tasks.find(
+        ({ taskId }) => taskId === first.taskId,
+      );
+    expect(due.length).toBeGreaterThan(0);
+    expect(again(unmarked)?.start_minutes).toBeGreaterThanOrEqual(now);
+    const mark = () =>
+      told<{ marked: number }>(owner, markAsPlanned, {
+        ...at(estimateId),
+        body: { taskIds: [...due.map(({ taskId }) => taskId), 'another/task'] },
+      });
+    expect(await mark()).toEqual({ marked: due.length });
+    expect(await mark()).toEqual({ marked: 0 });
+    const marked = await programmeOf(api.ours, estimateId);
+    expect([marked.isCurrent, marked.plan, marked.marks.length]).toEqual([true, plan, due.length]);
+    const { start_minutes, end_minutes, personIds } = first;
+    expect(again(marked)).toMatchObject({ start_minutes, end_minutes, personIds });
   });
 
   test('reads nobody else’s day, and of an unknown sign-in nothing', async () => {

@@ -1,6 +1,7 @@
 import {
   listFeeds,
   makeFeed,
+  markAsPlanned,
   markTask,
   readBenchDay,
   readBoard,
@@ -24,6 +25,7 @@ export const boardRoutes = ({ board, bench, marks, feeds }: Services): Route[] =
   mount(readBoard, ({ actor, query }) => board.read(actor.workshopId, query)),
   mount(readBenchDay, ({ actor, query }) => bench.day(actor, query)),
   mount(markTask, ({ actor, params, body }) => marks.mark(actor, params.estimateId, body)),
+  mount(markAsPlanned, ({ actor, params, body }) => marks.asPlanned(actor, params.estimateId, body.taskIds)),
   mount(listFeeds, async ({ actor }) => ({ items: (await feeds.list(actor)).map(presentFeed) })),
   mount(makeFeed, ({ actor, params, body }) => feeds.make(actor, params.feedId, body)),
   mount(revokeFeed, async ({ actor, params }) => presentFeed(await feeds.revoke(actor, params.feedId))),

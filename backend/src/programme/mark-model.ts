@@ -9,6 +9,8 @@ export interface MarkRow extends WorkshopRow {
   readonly startedAt: Date;
   readonly endedAt: Date | null;
   readonly leftMinutes: number;
+  /** When that was left; null: at its start. */
+  readonly leftAt: Date | null;
   readonly personIds: readonly string[];
 }
 
@@ -21,5 +23,6 @@ export const markTable = (database: Database) =>
     startedAt: column.instant,
     endedAt: column.instant,
     leftMinutes: column.whole,
+    leftAt: column.instant,
     personIds: column.json,
   });

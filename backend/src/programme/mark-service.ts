@@ -4,7 +4,10 @@ import { dayOfInstant } from '#shared/calendar/day-of-instant';
 import { benchTaskOf, type BenchJob } from '#shared/programme/bench-day-of';
 import type { MarkEntry } from '#shared/programme/bench-day-schema';
 import type { BenchTask } from '#shared/programme/bench-task';
+import { millisecondsOf, minutesOf } from '#shared/programme/programme-frame';
 import type { ProgrammeItem } from '#shared/programme/programme-item';
+import { standAsPlanned } from '#shared/programme/stand-as-planned';
+import { unmarkedTasks } from '#shared/programme/unmarked-tasks';
 import type { WordCode } from '#shared/words/word-code';
 import { Rejection } from '#shared/problems/rejection';
 import type { Audit } from '../audit';
@@ -27,10 +30,11 @@ interface Marking {
   readonly entry: MarkEntry;
   readonly item: ProgrammeItem;
   readonly at: Date;
+  readonly now: Date;
   readonly personIds: readonly string[];
 }
 
-type Stand = Pick<MarkRow, 'startedAt' | 'endedAt' | 'leftMinutes' | 'personIds'>;
+type Stand = Pick<MarkRow, 'startedAt' | 'endedAt' | 'leftMinutes' | 'leftAt' | 'personIds'>;
 
 const codes: Record<MarkEntry['mark'], WordCode> = {
   started: 'history-task-started',
@@ -42,16 +46,17 @@ const ofInstant = (code: WordCode): Rejection =>
   new Rejection('invalid', 'problem-invalid', { complaints: [{ path: ['at'], code, values: {} }] });
 
 /** Where a task stands once it is marked; a start that was marked before stays, and so do the people at it. */
-function standAfter({ entry, item, at, personIds }: Marking, before: MarkRow | undefined): Stand {
+function standAfter({ entry, item, at, now, personIds }: Marking, before: MarkRow | undefined): Stand {
   const startedAt = before?.startedAt ?? at;
   const people = before ? before.personIds : personIds;
   if (entry.mark === 'started') {
-    const begunAgain = before?.endedAt ? at : startedAt;
-    const left = entry.left_minutes ?? before?.leftMinutes ?? item.handsOn_minutes;
-    return { startedAt: before?.endedAt ? begunAgain : startedAt, endedAt: null, leftMinutes: left, personIds: people };
+    const begun = { startedAt: before?.endedAt ? at : startedAt, endedAt: null, personIds: people };
+    if (entry.left_minutes !== null) return { ...begun, leftMinutes: entry.left_minutes, leftAt: now };
+    const left = before?.leftMinutes ?? item.handsOn_minutes;
+    return { ...begun, leftMinutes: left, leftAt: before?.leftAt ?? null };
   }
   if (at < startedAt) throw ofInstant('programme-mark-before-start');
-  return { startedAt, endedAt: at, leftMinutes: 0, personIds: people };
+  return { startedAt, endedAt: at, leftMinutes: 0, leftAt: null, personIds: people };
 }
 
 /** Said already: a second press of the same button changes nothing. */
@@ -67,18 +72,56 @@ export class MarkService {
 
   async mark(actor: Actor, estimateId: string, entry: MarkEntry): Promise<BenchTask> {
     const { workshopId } = actor;
+    const { jobId, bench, job } = await this.worked(workshopId, estimateId);
+    const marking = this.marking(actor, entry, { bench, job });
+    const before = await this.parts.marks.ofTask(workshopId, { programmeId: estimateId, taskId: entry.taskId });
+    if (!saysAlready(before, entry)) {
+      await this.write(workshopId, estimateId, { marking, before });
+      await this.record(actor, marking, { estimateId, jobId });
+    }
+    return this.read(workshopId, estimateId, entry.taskId);
+  }
+
+  /** Says of tasks that they went as they were planned up to now, by those they were planned for. */
+  async asPlanned(actor: Actor, estimateId: string, taskIds: readonly string[]): Promise<{ marked: number }> {
+    const { workshopId } = actor;
+    const { jobId, bench, job } = await this.worked(workshopId, estimateId);
+    const now_minutes = minutesOf(this.parts.clock.now().toISOString(), bench.frame);
+    const asked = new Set(taskIds);
+    const due = unmarkedTasks({ plan: job.plan, marks: job.marks, now_minutes }).filter((taskId) => asked.has(taskId));
+    const items = due.flatMap((taskId) => job.items.find((item) => item.taskId === taskId) ?? []);
+    for (const item of items) await this.insertAsPlanned(workshopId, item, { bench, job, now_minutes });
+    if (items.length === 0) return { marked: 0 };
+    const values = { name: actor.name, tasks: items.length, task: items[0].name, lot: items[0].lot };
+    const subject = { kind: 'programme', id: estimateId } as const;
+    await this.parts.audit.record(actor, { subject, jobId, code: 'history-tasks-as-planned', values });
+    return { marked: items.length };
+  }
+
+  private async insertAsPlanned(
+    workshopId: string,
+    { taskId, handsOn_minutes }: ProgrammeItem,
+    { bench, job, now_minutes }: { bench: Bench; job: BenchJob; now_minutes: number },
+  ): Promise<void> {
+    const task = job.plan.tasks.find((one) => one.taskId === taskId);
+    const stand = task && standAsPlanned(task, now_minutes);
+    if (!stand) return;
+    const instant = (minutes: number): Date => new Date(millisecondsOf(minutes, bench.frame));
+    const endedAt = stand.end_minutes === null ? null : instant(stand.end_minutes);
+    await this.parts.marks.insert(workshopId, {
+      ...{ id: newId(), programmeId: job.estimateId, taskId, startedAt: instant(stand.start_minutes), endedAt },
+      ...{ leftMinutes: endedAt ? 0 : handsOn_minutes, leftAt: null, personIds: task.personIds },
+    });
+  }
+
+  /** The job as it is worked at the bench, its programme held until the transaction ends. */
+  private async worked(workshopId: string, estimateId: string) {
     const { estimate } = await this.parts.estimates.drafts.whole(workshopId, estimateId);
     await this.parts.programmes.hold(workshopId, estimateId);
     const bench = await this.parts.bench.bench(workshopId);
     const job = bench.jobs.find((one) => one.estimateId === estimateId);
     if (!job) throw new Rejection('conflict', 'programme-mark-not-on-board');
-    const marking = this.marking(actor, entry, { bench, job });
-    const before = await this.parts.marks.ofTask(workshopId, { programmeId: estimateId, taskId: entry.taskId });
-    if (!saysAlready(before, entry)) {
-      await this.write(workshopId, estimateId, { marking, before });
-      await this.record(actor, marking, { estimateId, jobId: estimate.jobId });
-    }
-    return this.read(workshopId, estimateId, entry.taskId);
+    return { jobId: estimate.jobId, bench, job };
   }
 
   /** Who marks a task is at it; where nobody at the bench bears the sign-in, those it was planned for are. */
@@ -92,7 +135,7 @@ export class MarkService {
     refuseFarMark(at, { today: bench.today, timeZone: bench.frame.timeZone });
     const own = ownPerson(bench.shop, actor);
     const personIds = own && !planned.personIds.includes(own.id) ? [own.id] : planned.personIds;
-    return { entry, item, at, personIds };
+    return { entry, item, at, now, personIds };
   }
 
   private async write(

@@ -69,6 +69,7 @@ export const presentMark = (row: MarkRow): TaskMark => ({
   startedAt: row.startedAt.toISOString(),
   endedAt: row.endedAt?.toISOString() ?? null,
   left_minutes: row.leftMinutes,
+  leftAt: (row.leftAt ?? row.startedAt).toISOString(),
   personIds: row.personIds,
 });
 

@@ -17,6 +17,7 @@ export interface ShownProgramme {
   /** The plan that was kept, in the minutes of the context's frame. */
   readonly kept: Pick<KeptPlan, 'plan' | 'dates'> | null;
   readonly hold: ProgrammeAnswer['hold'];
+  readonly isAccepted: boolean;
 }
 
 /** The slot that is held, if its issue is still with the client and its validity has not ended. */
@@ -59,6 +60,7 @@ export function presentProgramme(context: ProgrammeContext, shown: ShownProgramm
     version: row?.version ?? 0,
     inputs,
     marks,
+    isAccepted: shown.isAccepted,
     ...presentFrame(frame),
     request,
     items,

@@ -169,6 +169,7 @@ export class ProgrammeService {
       ...{ planned: programmeIn(context, now_minutes), kept },
       standing: kept && programmeIn(context, kept.plan.from_minutes),
       hold: holdOf(row, issues, today),
+      isAccepted: issues.some(({ state }) => state === 'accepted'),
     });
   }
 }

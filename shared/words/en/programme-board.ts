@@ -64,6 +64,8 @@ export const programmeBoard = {
   'history-slot-released': 'Gave the held slot of estimate {number} up',
   'history-task-started': '{name} started {task} of {lot}',
   'history-task-finished': '{name} finished {task} of {lot}',
+  'history-tasks-as-planned':
+    '{name} said of {tasks, plural, one {one task} other {# tasks}} that all went as planned: {task} of {lot}{tasks, plural, one {} other { and others}}',
   'history-task-unmarked': '{name} took back where {task} of {lot} stands',
   'history-feed-made': 'Made the calendar {name} for other programs',
   'history-feed-revoked': 'Took the calendar {name} back',

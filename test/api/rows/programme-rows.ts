@@ -119,6 +119,13 @@ export const programmeRows: MatrixRows = {
     },
     history: 'history-task-started',
   },
+  // Of a plan that was just made nothing should have begun yet, so nothing is marked.
+  markAsPlanned: {
+    prepare: async (workshop, api, caller) => {
+      const { estimateId, programme } = await acceptedSample(workshop, api, ownCaller(workshop, caller));
+      return { params: { estimateId }, body: { taskIds: [programme.items[0].taskId] } };
+    },
+  },
   listFeeds: { prepare: () => ({}) },
   makeFeed: {
     prepare: (workshop, _api, caller) => feedEntry(workshop, caller),

@@ -1,5 +1,5 @@
 import { Injectable, inject } from '@angular/core';
-import { markTask, readBenchDay } from '#shared/programme/board-endpoints';
+import { markAsPlanned, markTask, readBenchDay } from '#shared/programme/board-endpoints';
 import type { BenchTask } from '#shared/programme/bench-task';
 import type { MarkKind } from '#shared/programme/bench-day-schema';
 import { Api } from '../../core/api/api';
@@ -11,6 +11,10 @@ export class BenchClient {
 
   day(asked: { readonly day?: string; readonly personId?: string }, signal: AbortSignal) {
     return this.api.call(readBenchDay, { query: asked, signal });
+  }
+
+  asPlanned({ estimateId, taskId }: BenchTask) {
+    return this.api.call(markAsPlanned, { params: { estimateId }, body: { taskIds: [taskId] } });
   }
 
   /** Now, as the server's clock has it. */

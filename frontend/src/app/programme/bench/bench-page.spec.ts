@@ -36,7 +36,8 @@ describe('BenchPage', () => {
     readBenchDay: (parts: AskedParts) => unknown,
     markTask: (parts: AskedParts) => unknown = () => task('a'),
   ) {
-    server = new AnsweringForSpecs({ readBenchDay, markTask, listFeeds: () => ({ items: [] }) });
+    const markAsPlanned = () => ({ marked: 1 });
+    server = new AnsweringForSpecs({ readBenchDay, markTask, markAsPlanned, listFeeds: () => ({ items: [] }) });
     const now = { provide: NOW, useValue: () => new Date('2027-01-05T09:00:00Z') };
     TestBed.configureTestingModule({ providers: [words, provideRouter([]), server.provider, now] });
     signIn(['bench']);
@@ -83,6 +84,24 @@ describe('BenchPage', () => {
     ]);
     expect(spoken(current())).toContain('In work since 09:00');
     expect(buttonIn(current(), 'Finished').disabled).toBe(false);
+  });
+
+  it('takes it that what nobody marked in time was done as planned, or begun, and never of what is to come', async () => {
+    const at = (startsAt: string, endsAt: string) => ({
+      ...{ startsAt: `2027-01-05T${startsAt}:00.000Z`, endsAt: `2027-01-05T${endsAt}:00.000Z` },
+    });
+    const [done, begun, later] = [
+      task('a', at('08:00', '08:40')),
+      task('b', at('08:30', '10:00')),
+      task('c', at('09:00', '10:00')),
+    ];
+    await open(() => dayOf({ tasks: [done, begun, later] }));
+    const said = [...element().querySelectorAll('button')].map(spoken).filter((text) => text.endsWith('as planned'));
+    expect(said).toEqual(['Done as planned', 'Begun as planned']);
+    const read = server.of('readBenchDay').length;
+    await press('Begun as planned');
+    expect(server.of('markAsPlanned')).toEqual([{ params: { estimateId: 'e1' }, body: { taskIds: ['b'] } }]);
+    expect(server.of('readBenchDay')).toHaveLength(read + 1);
   });
 
   it('says why something was not marked, and leaves it as it was', async () => {

@@ -141,11 +141,26 @@ export class BenchPage {
     this.asked.set(day === this.today() ? undefined : day);
   }
 
-  protected async mark(task: BenchTask, mark: MarkKind): Promise<void> {
+  /** What may be said of work whose planned time came and that nobody marked in time; nothing where that is not so. */
+  protected asPlanned({ state, startsAt, endsAt }: BenchTask): string {
+    const now = this.now().getTime();
+    if (state !== 'ready' || Date.parse(startsAt) >= now) return '';
+    return Date.parse(endsAt) <= now ? $localize`Done as planned` : $localize`Begun as planned`;
+  }
+
+  protected mark(task: BenchTask, mark: MarkKind): Promise<void> {
+    return this.marked(() => this.client.mark(task, mark));
+  }
+
+  protected markAsPlanned(task: BenchTask): Promise<void> {
+    return this.marked(() => this.client.asPlanned(task));
+  }
+
+  private async marked(say: () => Promise<unknown>): Promise<void> {
     if (this.isBusy()) return;
     this.isBusy.set(true);
     try {
-      await this.client.mark(task, mark);
+      await say();
       this.reading.reload();
     } catch (error) {
       if (!(error instanceof ProblemError)) throw error;

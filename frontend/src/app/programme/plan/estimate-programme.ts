@@ -21,6 +21,7 @@ import { ProgrammeStart } from './programme-start';
 import { ProgrammeStore } from './programme-store';
 import { ShownProgramme } from './shown-programme';
 import { TaskPanel } from './task-panel';
+import { UnmarkedNotice } from './unmarked-notice';
 import { WhatIfPanel } from './what-if-panel';
 
 /** The programme of an estimate: when it is ready, the dated ribbon, planning it, pins, approvals, and other ways compared. */
@@ -37,6 +38,7 @@ import { WhatIfPanel } from './what-if-panel';
     RibbonTable,
     Skeleton,
     TaskPanel,
+    UnmarkedNotice,
     WhatIfPanel,
   ],
   changeDetection: ChangeDetectionStrategy.OnPush,

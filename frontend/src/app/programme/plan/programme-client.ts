@@ -15,6 +15,7 @@ import {
 import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import type { Programme } from '#shared/programme/programme-plan';
 import type { WhatIf } from '#shared/programme/what-if';
+import { markAsPlanned } from '#shared/programme/board-endpoints';
 import { Api } from '../../core/api/api';
 
 /** The calls about the programme of one estimate. */
@@ -59,6 +60,10 @@ export class ProgrammeClient {
 
   whatIf(estimateId: string, asked: WhatIf) {
     return this.api.call(readWhatIf, { params: { estimateId }, body: asked as BodyOf<typeof readWhatIf> });
+  }
+
+  markAsPlanned(estimateId: string, taskIds: readonly string[]) {
+    return this.api.call(markAsPlanned, { params: { estimateId }, body: { taskIds: [...taskIds] } });
   }
 
   hold(estimateId: string) {

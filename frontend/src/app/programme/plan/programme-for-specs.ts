@@ -39,7 +39,18 @@ export function programmeForSpecs(change: Partial<ProgrammeAnswer> = {}): Progra
   const plan = JSON.parse(JSON.stringify(programme(request))) as NonNullable<ProgrammeAnswer['plan']>;
   const finishesOn = dayOfMinutes(plan.finish_minutes ?? 0, frame);
   return {
-    ...{ estimateId, version: 2, marks: [], request, items, plan, isCurrent: true, broken: [], hold: null },
+    ...{
+      estimateId,
+      version: 2,
+      marks: [],
+      isAccepted: false,
+      request,
+      items,
+      plan,
+      isCurrent: true,
+      broken: [],
+      hold: null,
+    },
     inputs: {
       ...{ direction: 'forward', day: '2027-01-04', climate: null, choice: [], inHand_days: 2 },
       ...{ lots: [], hands: [], pins: [], approvals: [] },

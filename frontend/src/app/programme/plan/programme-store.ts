@@ -145,6 +145,15 @@ export class ProgrammeStore {
     return { ...answer.inputs, pins: [...others, ...own] };
   }
 
+  /** Says of tasks that they went as they were planned, and reads where all of it stands now. */
+  async markAsPlanned(taskIds: readonly string[]): Promise<boolean> {
+    const isMarked = await this.attempt(async ({ estimateId }) => {
+      await this.client.markAsPlanned(estimateId, taskIds);
+    });
+    if (isMarked) this.reload();
+    return isMarked;
+  }
+
   async hold(isHeld: boolean): Promise<boolean> {
     return this.attempt(async ({ estimateId }) => {
       this.take(await (isHeld ? this.client.hold(estimateId) : this.client.release(estimateId)));
