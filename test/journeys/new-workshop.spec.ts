@@ -49,6 +49,20 @@ async function measure(page: Page): Promise<void> {
   await page.getByText('1.94 ft²').first().waitFor();
 }
 
+/** What stands on a sheet of paper, which is as narrow as a phone: the part that is open, not the list it was chosen from. */
+async function printed(page: Page, heading: string): Promise<boolean> {
+  const screen = page.viewportSize();
+  await page.emulateMedia({ media: 'print' });
+  await page.setViewportSize({ width: 718, height: 1000 });
+  const [isThere, isListed] = await Promise.all([
+    page.getByRole('heading', { name: heading, exact: true }).isVisible(),
+    page.getByRole('navigation', { name: 'Parts of the price' }).isVisible(),
+  ]);
+  await page.emulateMedia({ media: 'screen' });
+  if (screen) await page.setViewportSize(screen);
+  return isThere && !isListed;
+}
+
 /** A paper as the browser saves it. */
 async function saved(page: Page, name: string): Promise<Buffer> {
   const download = page.waitForEvent('download');
@@ -72,6 +86,7 @@ it('founds a workshop, opens a job, costs a base and issues it with its papers',
   await page.getByRole('link', { name: /^Price/ }).click();
   await page.getByRole('heading', { name: 'Lines' }).waitFor();
   await see('journey price');
+  expect(await printed(page, 'Lines')).toBe(true);
   await page.getByRole('link', { name: 'Issue', exact: true }).first().click();
   await page.getByRole('button', { name: 'Issue A' }).click();
   await page.getByText('Issue A is made, with its papers.').waitFor();

@@ -25,7 +25,7 @@ interface ZoneTime {
     <app-figure-table
       captionShown
       i18n-caption
-      caption="Zones, each with the waiting of its lot"
+      caption="Zones, without setting up, each with the waiting of its lot"
       [columns]="columns()"
       [rows]="rows()"
       [rowId]="idOf"

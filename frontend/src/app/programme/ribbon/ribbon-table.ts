@@ -1,11 +1,11 @@
-import { ChangeDetectionStrategy, Component, input, signal } from '@angular/core';
+import { ChangeDetectionStrategy, ChangeDetectorRef, Component, inject, input, signal } from '@angular/core';
 import type { RibbonLot } from './ribbon-lot';
 
 /** All a ribbon shows, as a table to be read aloud or printed; made when it is opened or printed. */
 @Component({
   selector: 'app-ribbon-table',
   changeDetection: ChangeDetectionStrategy.OnPush,
-  host: { '(window:beforeprint)': 'isOpen.set(true)' },
+  host: { '(window:beforeprint)': 'openForPrint()' },
   template: `
     <details #all [open]="isOpen()" (toggle)="isOpen.set(all.open)">
       <summary i18n>The same as a table</summary>
@@ -78,6 +78,10 @@ import type { RibbonLot } from './ribbon-lot';
       summary {
         display: none;
       }
+
+      table {
+        min-width: 0;
+      }
     }
   `,
 })
@@ -85,5 +89,12 @@ export class RibbonTable {
   readonly first = input.required<string>();
   readonly lots = input.required<readonly RibbonLot[]>();
 
+  private readonly view = inject(ChangeDetectorRef);
   protected readonly isOpen = signal(false);
+
+  /** The paper is taken as soon as this returns, before the page would be drawn anew by itself. */
+  protected openForPrint(): void {
+    this.isOpen.set(true);
+    this.view.detectChanges();
+  }
 }
