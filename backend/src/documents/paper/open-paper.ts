@@ -1,7 +1,7 @@
 import PDFDocument from 'pdfkit';
 import { printableText } from '#shared/words/printable-text';
 import { paperFonts } from './paper-fonts';
-import { pageMargins, type PaperFont } from './paper-colours';
+import { pageMargins } from './paper-colours';
 
 /** What a paper is, apart from what stands on it. */
 export interface PaperFacts {
@@ -51,7 +51,6 @@ const accessibleMark = `
 
 /** A paper with no page yet: tagged, with its language and title, the fonts of the house embedded. */
 export function openPaper(facts: PaperFacts): Pdf {
-  const fonts = paperFonts();
   const pdf = new PDFDocument({
     size: facts.size === 'A4' ? 'A4' : 'LETTER',
     margins: { ...pageMargins },
@@ -74,7 +73,8 @@ export function openPaper(facts: PaperFacts): Pdf {
       CreationDate: new Date(facts.madeAt),
     },
   });
-  for (const [name, font] of Object.entries(fonts) as [PaperFont, Buffer][]) pdf.registerFont(name, font);
+  // The library takes an opened font as well, which its types do not know.
+  for (const [name, font] of Object.entries(paperFonts())) pdf.registerFont(name, font as unknown as Buffer);
   escapeDescription(pdf);
   if (facts.isArchival) (pdf as unknown as { appendXML: (xml: string) => void }).appendXML(accessibleMark);
   return pdf;

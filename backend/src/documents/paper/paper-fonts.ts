@@ -1,5 +1,6 @@
 import { existsSync, readFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
+import { create, type Font } from 'fontkit';
 import type { PaperFont } from './paper-colours';
 
 const fileNames: Readonly<Record<PaperFont, string>> = {
@@ -18,12 +19,15 @@ function fontFolder(from: string): string {
   return fontFolder(above);
 }
 
-let read: Readonly<Record<PaperFont, Buffer>> | null = null;
+let opened: Readonly<Record<PaperFont, Font>> | null = null;
 
-/** The fonts papers are set in, whole, with all their scripts. */
-export function paperFonts(): Readonly<Record<PaperFont, Buffer>> {
+/**
+ * The fonts papers are set in, whole, with all their scripts; each is opened once for all papers, since finding one's way through its tables
+ * takes longer than setting a paper.
+ */
+export function paperFonts(): Readonly<Record<PaperFont, Font>> {
   const folder = fontFolder(__dirname);
-  const file = (font: PaperFont) => readFileSync(join(folder, fileNames[font]));
-  read ??= { heading: file('heading'), text: file('text'), medium: file('medium'), bold: file('bold') };
-  return read;
+  const font = (name: PaperFont) => create(readFileSync(join(folder, fileNames[name])));
+  opened ??= { heading: font('heading'), text: font('text'), medium: font('medium'), bold: font('bold') };
+  return opened;
 }
