@@ -84,6 +84,16 @@ describe('Help', () => {
     ).toEqual(['programme-remedy-further-hands', 'programme-remedy-further-hands', 'programme-remedy-longer-day']);
   });
 
+  it('is tried with the task where it was put: no hands and no size make anybody work at three in the night', async () => {
+    await opened();
+    const planning = TestBed.inject(ProgrammePlanning);
+    expect(await planning.place('lay', day + 180)).toBe(false);
+    expect(planning.findings().map(({ code }) => code)).toEqual(['programme-pin-closed']);
+    await planning.help();
+    const helped = planning.remedies()?.filter(({ plan }) => plan.finish_minutes !== null);
+    expect([planning.remedies()?.length === 0, helped]).toEqual([false, []]);
+  });
+
   it('can be stopped, and why there is no plan stays to be read', async () => {
     let isSilent = false;
     const silent = () => Object.assign(new EventTarget(), { terminate: () => undefined, postMessage: () => undefined });

@@ -2,6 +2,8 @@ import { DestroyRef, Injectable, computed, inject, signal } from '@angular/core'
 import type { SolutionAnswer } from '#shared/programme/solution-schema';
 import type { ProgrammeInputs } from '#shared/programme/programme-inputs';
 import type { Programme } from '#shared/programme/programme-plan';
+import type { ProgrammeRequest } from '#shared/programme/programme-request';
+import { requestFrom } from '#shared/programme/request-from';
 import type { Finding } from '#shared/words/finding';
 import { Notices } from '../../core/problems/notices';
 import { ProblemError } from '../../core/problems/problem-error';
@@ -16,6 +18,18 @@ const replanSeconds = 4;
 const serverSeconds = 30;
 const pollEvery_ms = 1000;
 
+/** What came of a request. */
+interface Planned {
+  readonly plan: Programme;
+  readonly request: ProgrammeRequest;
+}
+
+/** Why there is no plan, and of what; of what the server was asked, the programme as it is. */
+interface Failed {
+  readonly plan: Programme;
+  readonly request: ProgrammeRequest | undefined;
+}
+
 /** Planning as a person asks for it: in the browser or on the server, anew or round a pinned task; what comes of it is a proposal or says why not. */
 @Injectable()
 export class ProgrammePlanning {
@@ -25,7 +39,7 @@ export class ProgrammePlanning {
   private readonly notices = inject(Notices);
   private readonly costs = inject(RemedyCosts);
   private readonly ended = new AbortController();
-  private readonly failed = signal<Programme | undefined>(undefined);
+  private readonly failed = signal<Failed | undefined>(undefined);
   private readonly ways = signal<readonly CostedRemedy[] | undefined>(undefined);
   private readonly running = signal<SolutionAnswer | undefined>(undefined);
 
@@ -36,7 +50,7 @@ export class ProgrammePlanning {
     () => (this.running()?.finish_minutes ?? this.planner.best()?.finish_minutes) || undefined,
   );
   /** Why there is no plan. */
-  readonly findings = computed<readonly Finding[]>(() => this.failed()?.findings ?? []);
+  readonly findings = computed<readonly Finding[]>(() => this.failed()?.plan.findings ?? []);
   /** What would help; undefined until it was asked. */
   readonly remedies = this.ways.asReadonly();
 
@@ -50,27 +64,32 @@ export class ProgrammePlanning {
     if (!request) return;
     const question = { request, search: this.store.search(movesLittle), seconds };
     const plan = await this.worked(() => this.planner.plan(question));
-    if (plan) this.take(plan, null);
+    if (plan) this.take({ plan, request }, null);
   }
 
   /** Plans round a task put elsewhere, or set free; nothing else moves that need not. True where it can be. */
   async place(taskId: string, start_minutes: number | null): Promise<boolean> {
     const [asked, plan, inputs] = [this.store.request(), this.store.plan(), this.store.withPin(taskId, start_minutes)];
+    this.clear();
     if (!asked || !plan || !inputs || isPast(start_minutes, asked)) return false;
     const request = pinnedRequest(asked, { taskId, start_minutes });
     const question = { request, search: { previous: plan }, seconds: replanSeconds };
     const found = await this.worked(() => this.planner.plan(question));
-    return found ? this.take(found, inputs) : false;
+    return found ? this.take({ plan: found, request }, inputs) : false;
   }
 
-  /** Tries what would help the task that finds no time, other sizes of its lot among it, or all of it where it comes too late, and reckons what that costs. */
+  /**
+   * Tries what would help the task that finds no time, other sizes of its lot among it, or all of it where it comes too late, and reckons what that costs; for
+   * what was asked, a task put elsewhere included.
+   */
   async help(): Promise<void> {
-    const [answer, request, about] = [
+    const [answer, asked, about] = [
       this.store.answer(),
-      this.store.request(),
+      this.failed()?.request ?? this.store.request(),
       this.findings().find(({ about }) => about)?.about,
     ];
-    if (!answer || !request) return;
+    if (!answer || !asked) return;
+    const request = requestFrom(asked, this.store.request()?.start_minutes ?? asked.start_minutes);
     const lotId = answer.items.find(({ taskId }) => taskId === about)?.lotId ?? '';
     const sizes = answer.otherSizes.filter((size) => size.lotId === lotId);
     const remedies = await this.unlessStopped(() =>
@@ -113,15 +132,15 @@ export class ProgrammePlanning {
   private end({ state, plan }: SolutionAnswer): void {
     if (state === 'outdated') this.notices.complain($localize`The programme was changed meanwhile; plan it again.`);
     if (state === 'failed') this.notices.complain($localize`The server could not plan it. Plan it here instead.`);
-    if (plan && plan.finish_minutes === null) this.failed.set(plan);
+    if (plan && plan.finish_minutes === null) this.failed.set({ plan, request: undefined });
     if (state === 'done' || state === 'stopped') this.notices.say($localize`The plan of the server was kept.`);
     this.store.reload();
   }
 
   /** Whether there is a plan; where there is none, it stays to be told why. */
-  private take(plan: Programme, inputs: ProgrammeInputs | null): boolean {
+  private take({ plan, request }: Planned, inputs: ProgrammeInputs | null): boolean {
     if (plan.finish_minutes === null) {
-      this.failed.set(plan);
+      this.failed.set({ plan, request });
       return false;
     }
     this.store.propose({ plan, inputs });
