@@ -7,7 +7,7 @@ import type { WorkshopService } from '../accounts';
 import type { FileStore } from '../platform/files/file-store';
 import type { EstimateRow } from './estimate-model';
 import type { EstimateRepository } from './estimate-repository';
-import { thawedSnapshot } from './frozen-snapshot';
+import { thawedSnapshot, titleOfIssue } from './frozen-snapshot';
 import type { IssueRow } from './issue-model';
 import type { IssueRepository } from './issue-repository';
 import type { PaperFile, PaperMaker } from './paper-maker';
@@ -53,7 +53,7 @@ export class FrozenIssueService {
     const rows = await this.parts.issues.ofEstimates(workshopId, [...byId.keys()]);
     return rows.flatMap((row) => {
       const estimate = byId.get(row.estimateId);
-      return estimate ? [{ row, estimate, title: thawedSnapshot(row).draft.settings.title }] : [];
+      return estimate ? [{ row, estimate, title: titleOfIssue(row) }] : [];
     });
   }
 

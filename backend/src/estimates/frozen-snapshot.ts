@@ -21,6 +21,18 @@ export function thawedSnapshot(row: Pick<IssueRow, 'snapshot' | 'sha256' | 'id'>
   return upgradedSnapshot(JSON.parse(json.toString('utf8')) as Snapshot);
 }
 
+/** Titles by the hash of what was frozen, which never changes: lists of many issues need nothing else of them. */
+const titles = new Map<string, string>();
+const mostTitles = 20_000;
+
+/** What an issue was called when it was issued. */
+export function titleOfIssue(row: Pick<IssueRow, 'snapshot' | 'sha256' | 'id'>): string {
+  const title = titles.get(row.sha256) ?? thawedSnapshot(row).draft.settings.title;
+  if (titles.size >= mostTitles) titles.clear();
+  titles.set(row.sha256, title);
+  return title;
+}
+
 /** A frozen estimate put as the tables would hold it, so that one presenter serves drafts and issues. */
 export function wholeOfSnapshot(
   { draft, estimate, workshop, issuedAt }: Snapshot,
