@@ -99,7 +99,7 @@ function exampleValues(workshop: WorkshopSettingsRow): LetterValues {
     workshop: workshop.name,
     job: words('example-job'),
     link: 'https://example.org/client#…',
-    number: '26-014-1 A',
+    number: words('paper-number-letter', { number: '2026-014-1', letter: 'A' }),
     total: money(1_284_000, workshop.currency),
     open: money(642_000, workshop.currency),
     day: day('2026-09-30'),
