@@ -53,6 +53,7 @@ describe('UnmarkedNotice', () => {
 
   it.each([
     ['before anything should have begun', { isAccepted: true }, '2027-01-04T07:00:00Z'],
+    ['while it is a matter of minutes', { isAccepted: true }, '2027-01-04T08:30:00Z'],
     ['once it is marked', { isAccepted: true, marks: [firstMark] }, '2027-01-04T09:00:00Z'],
     ['of a job that is not accepted: nothing of it can have happened', {}, '2027-01-04T09:00:00Z'],
   ])('says nothing %s', async (_, change, now) => {

@@ -8,6 +8,9 @@ import { TaskWords } from './task-words';
 /** So many tasks are named, the others counted. */
 const mostNamed = 3;
 
+/** Nobody marks to the minute; by so little it may as well begin later. */
+const grace_minutes = 30;
+
 /** Work of an accepted job that should have begun by now and that nobody marked: planned anew it begins now, unless it is said that it went as planned. */
 @Component({
   selector: 'app-unmarked-notice',
@@ -50,7 +53,9 @@ export class UnmarkedNotice {
     if (!answer?.isAccepted || !answer.plan || now_minutes === undefined) return [];
     const { plan, marks, items } = answer;
     const known = new Map(items.map((item) => [item.taskId, item]));
-    return unmarkedTasks({ plan, marks, now_minutes }).flatMap((taskId) => known.get(taskId) ?? []);
+    return unmarkedTasks({ plan, marks, now_minutes: now_minutes - grace_minutes }).flatMap(
+      (taskId) => known.get(taskId) ?? [],
+    );
   });
   protected readonly told = computed(() => {
     const all = this.unmarked();
