@@ -41,7 +41,7 @@ export class SignInDialog {
 /** Opens the dialog for one person; undefined when they would rather not. */
 export async function askForSignIn(injector: Injector, email: string): Promise<SessionAnswer | undefined> {
   // Who it is stands fixed; one begins at what is to be typed.
-  const settings = { data: email, maxWidth: 480, disableClose: true, autoFocus: 'input:not([readonly])' };
+  const settings = { data: email, width: '480px', disableClose: true, autoFocus: 'input:not([readonly])' };
   const dialog = injector.get(MatDialog).open<SignInDialog, string, SessionAnswer>(SignInDialog, settings);
   return firstValueFrom(dialog.afterClosed());
 }

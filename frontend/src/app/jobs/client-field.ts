@@ -142,7 +142,7 @@ export class ClientField extends ValueEntry<string | null> {
 
   private async enter(name: string): Promise<void> {
     this.isEntering.set(true);
-    const options = { data: name, width: '640px', maxWidth: '96vw' };
+    const options = { data: name, width: '640px' };
     const client = await firstValueFrom(
       this.dialog.open<ClientDialog, string, Client>(ClientDialog, options).afterClosed(),
     );

@@ -12,7 +12,7 @@ export class Confirm {
   async ask(question: ConfirmQuestion): Promise<boolean> {
     const asked = this.dialog.open<ConfirmDialog, ConfirmQuestion, boolean>(ConfirmDialog, {
       data: question,
-      maxWidth: 480,
+      width: '480px',
     });
     return (await firstValueFrom(asked.afterClosed())) === true;
   }
