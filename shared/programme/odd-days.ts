@@ -52,13 +52,26 @@ export function startOfDay_ms(day: Day, timeZone: string): number {
   return on_ms;
 }
 
+interface OddDay {
+  readonly day: Day;
+  readonly length_minutes: number;
+}
+
+/** Asked for every plan of a day anew, and always the same: what was found last is kept. */
+const found = new Map<string, readonly OddDay[]>();
+const mostFound = 64;
+
 /** The days of another length than 24 hours among so many from a first one on, because the clocks change; lengths in minutes. */
-export function oddDays(
-  firstDay: Day,
-  days: number,
-  timeZone: string,
-): { readonly day: Day; readonly length_minutes: number }[] {
-  const odd: { day: Day; length_minutes: number }[] = [];
+export function oddDays(firstDay: Day, days: number, timeZone: string): readonly OddDay[] {
+  const key = `${firstDay} ${days} ${timeZone}`;
+  const odd = found.get(key) ?? oddDaysLookedUp(firstDay, days, timeZone);
+  if (found.size >= mostFound) found.clear();
+  found.set(key, odd);
+  return odd;
+}
+
+function oddDaysLookedUp(firstDay: Day, days: number, timeZone: string): OddDay[] {
+  const odd: OddDay[] = [];
   let start_ms = startOfDay_ms(firstDay, timeZone);
   for (let at = 0; at < days; at += 1) {
     const next_ms = start_ms + day_ms;
