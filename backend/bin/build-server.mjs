@@ -1,6 +1,6 @@
 import { context, build } from 'esbuild';
 import { dirname, join } from 'node:path';
-import { fileURLToPath, pathToFileURL } from 'node:url';
+import { fileURLToPath } from 'node:url';
 
 const root = join(dirname(fileURLToPath(import.meta.url)), '../..');
 
@@ -39,5 +39,3 @@ export async function watchServer(onBuilt) {
   await watching.watch();
   return () => watching.dispose();
 }
-
-if (import.meta.url === pathToFileURL(process.argv[1] ?? '').href) await buildServer();
