@@ -6,7 +6,7 @@ export const workedOut = '8309';
 const templates = '{{7*1187}}${7*1187}<%= 7*1187 %>#{7*1187}';
 
 /** Ways text has become script, markup, style, address or template elsewhere (OWASP on cross-site scripting and injection). */
-const hostileTexts: readonly string[] = [
+export const hostileTexts: readonly string[] = [
   '<script>alert(1)</script>',
   '<img src=x onerror=alert(1)>',
   '"><svg onload=alert(1)>',
