@@ -43,7 +43,7 @@ describe('UnmarkedNotice', () => {
     expect(spoken(element().querySelector('p'))).toBe(
       'Should have begun by now, and nobody marked it: Leg, Carving, Carver.',
     );
-    buttonIn(element(), 'All of it went as planned').click();
+    buttonIn(element(), 'It all went as planned').click();
     await settle();
     expect(server.of('markAsPlanned')).toEqual([
       { params: { estimateId: stands.estimateId }, body: { taskIds: ['carve'] } },

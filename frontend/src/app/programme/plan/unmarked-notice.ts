@@ -22,7 +22,7 @@ const grace_minutes = 30;
         <p>{{ told() }}</p>
         <p class="muted" i18n>Planned again, they begin now, with all that follows them.</p>
         <button matButton="outlined" type="button" [disabled]="store.isKeeping()" (click)="mark()" i18n>
-          All of it went as planned
+          It all went as planned
         </button>
       </section>
     }
