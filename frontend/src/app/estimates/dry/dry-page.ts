@@ -7,6 +7,7 @@ import { ReasonPanel } from '../../ui/figure/reason-panel';
 import { EmptyState } from '../../ui/page/empty-state';
 import { FindingList } from '../../ui/page/finding-list';
 import { LaterWidget } from '../../ui/page/later-widget';
+import { elapsedWords } from '../elapsed-words';
 import { EstimateStore } from '../estimate-store';
 import { PlaceExplanation } from '../places/place-explanation';
 import { ReadyDay } from '../workspace/ready-day';
@@ -73,8 +74,9 @@ export class DryPage {
   protected readonly heading = computed(() => {
     const dry = this.dry();
     if (!dry) return '';
-    const [days, weeks] = [this.formats.number(dry.elapsed_workingDays, 0), this.formats.number(dry.elapsed_weeks, 1)];
-    return $localize`${days}:days: working days, ${weeks}:weeks: weeks`;
+    const elapsed = { workingDays: dry.elapsed_workingDays, weeks: dry.elapsed_weeks };
+    const { days, weeks } = elapsedWords(this.formats, elapsed);
+    return `${days}, ${weeks}`;
   });
   /** The lot whose steps are told: the one chosen, else the first. */
   protected readonly chosen = computed(

@@ -5,6 +5,7 @@ import { filter, map, startWith } from 'rxjs';
 import type { Triple } from '#shared/units/triple';
 import { Formats } from '../../core/formats/formats';
 import type { TallyCell } from '../../ui/page/tally-cell';
+import { elapsedWords } from '../elapsed-words';
 import { EstimateStore } from '../estimate-store';
 import { MemberSelection } from '../members/member-selection';
 import { ReadyDay } from './ready-day';
@@ -42,11 +43,12 @@ export class EstimateTally {
   private workCells(): TallyCell[] {
     const tally = this.store.figures()?.tally;
     if (!tally) return [];
+    const elapsed = elapsedWords(this.formats, tally);
     return [
       {
         name: $localize`Measure`,
         figure: this.formats.area(tally.true_mm2),
-        minor: $localize`${tally.members}:count: members`,
+        minor: tally.members === 1 ? $localize`one member` : $localize`${tally.members}:count: members`,
         route: this.route('measure'),
       },
       {
@@ -63,8 +65,8 @@ export class EstimateTally {
       },
       {
         name: $localize`Dry`,
-        figure: $localize`${this.formats.number(tally.weeks, 1)}:weeks: weeks`,
-        minor: this.readyBy() ?? $localize`${this.formats.number(tally.workingDays, 0)}:days: working days`,
+        figure: elapsed.weeks,
+        minor: this.readyBy() ?? elapsed.days,
         route: this.route('dry'),
       },
     ];
