@@ -5,21 +5,26 @@ import { Formats } from '../../core/formats/formats';
 import { FigureTable } from '../../ui/table/figure-table';
 import { PlanOfPayment } from '../price/plan-of-payment';
 import type { StageRow } from '../price/stage-rows';
+import { TakenAwayNote } from '../price/taken-away-note';
 
 /** How the contract is paid, as it was frozen. */
 @Component({
   selector: 'app-frozen-payments',
-  imports: [FigureTable],
+  imports: [FigureTable, TakenAwayNote],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
-    <app-figure-table
-      i18n-caption
-      caption="Payments, with tax"
-      captionShown
-      [columns]="columns()"
-      [rows]="rows()"
-      [rowId]="rowId"
-    />
+    @if (gross_minor() < 0) {
+      <app-taken-away-note [gross_minor]="gross_minor()" />
+    } @else {
+      <app-figure-table
+        i18n-caption
+        caption="Payments, with tax"
+        captionShown
+        [columns]="columns()"
+        [rows]="rows()"
+        [rowId]="rowId"
+      />
+    }
   `,
 })
 export class FrozenPayments {
@@ -28,6 +33,7 @@ export class FrozenPayments {
 
   readonly stages = input.required<EstimateSettings['stages']>();
   readonly payments = input.required<StagePayments>();
+  readonly gross_minor = input.required<number>();
 
   protected readonly columns = computed(() => this.plan.columns(() => '', false));
   protected readonly rows = computed(() => {

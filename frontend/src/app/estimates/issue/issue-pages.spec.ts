@@ -311,6 +311,14 @@ describe('The pages of issues', () => {
       expect(element().querySelectorAll('app-frozen-dates li')).toHaveLength(2);
     });
 
+    it('of a variation that takes away shows how it is settled, and no payments', async () => {
+      read = { summary: { ...issueA, gross_minor: -1_800_00 } };
+      await open(IssueViewPage, view);
+      const payments = element().querySelector('app-frozen-payments');
+      expect(spoken(payments)).toContain('€1,800.00 is taken off what was agreed');
+      expect(payments?.querySelector('table')).toBeNull();
+    });
+
     describe('with alternatives', () => {
       const alternative = { id: ids.leg, name: 'Bare at the back', group: '', note: '', replaces: [] };
       const total = { id: ids.leg, gross_minor: 55_000, difference_minor: -5000 };

@@ -427,6 +427,17 @@ describe('PricePage', () => {
       ]);
     });
 
+    it('never of what a variation takes away: it is credited whole', async () => {
+      await open('stages');
+      expect(element().querySelector('app-taken-away-note')).toBeNull();
+      const line = { id: ids.piece, name: 'Left out', taxCategoryId: 'standard', memberId: null, alternativeId: null };
+      store.changeSettings({ extras: [{ ...line, kind: 'price', price: '-900000' }] });
+      await settle(700);
+      expect(store.priced()!.price.gross_minor).toBeLessThan(0);
+      expect(spoken(element().querySelector('app-taken-away-note'))).toMatch(/^€[\d,.]+ is taken off what was agreed/);
+      expect(element().querySelector('app-stages-part app-figure-table')).toBeNull();
+    });
+
     it('that come to 100 %, waiting with those that do not, and shows every payment to the cent', async () => {
       await open('stages');
       const before = server.settings.stages.parts;

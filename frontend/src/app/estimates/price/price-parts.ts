@@ -67,6 +67,8 @@ export class PriceParts {
   private stages(): Part {
     const { parts = [], deposit_percent = 0 } = this.store.settings()?.stages ?? {};
     const deposit = this.formats.figure('percent', deposit_percent);
+    if ((this.store.priced()?.price.gross_minor ?? 0) < 0)
+      return this.part('stages', $localize`Stages of payment`, { about: $localize`none, it is credited`, amount: '' });
     return this.part('stages', $localize`Stages of payment`, {
       about: deposit_percent > 0 ? $localize`deposit of ${deposit}:percent:` : $localize`no deposit`,
       amount: parts.length === 0 ? '' : String(parts.length),

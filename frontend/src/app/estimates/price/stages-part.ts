@@ -12,6 +12,7 @@ import { PlanOfPayment } from './plan-of-payment';
 import { readStages, stageEntriesOf, type StageEntry } from './stage-entries';
 import type { StageRow } from './stage-rows';
 import { StageTermsForm } from './stage-terms-form';
+import { TakenAwayNote } from './taken-away-note';
 
 const key = 'stage parts';
 const noTerms = { deposit_percent: 0, retention_percent: 0 };
@@ -19,7 +20,7 @@ const noTerms = { deposit_percent: 0, retention_percent: 0 };
 /** How the contract is paid: deposit, stages that come to 100 %, retention; every payment to the last cent. */
 @Component({
   selector: 'app-stages-part',
-  imports: [FigureTable, MatButton, StageTermsForm],
+  imports: [FigureTable, MatButton, StageTermsForm, TakenAwayNote],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './stages-part.html',
   styles: `
@@ -44,6 +45,8 @@ export class StagesPart {
   protected readonly store = inject(EstimateStore);
 
   protected readonly chosen = signal<string | undefined>(undefined);
+  /** What a variation takes away; 0 where something is to be paid. */
+  protected readonly takenAway_minor = computed(() => Math.min(0, this.store.priced()?.price.gross_minor ?? 0));
   /** As typed, while they do not come to 100 %; else as they are kept. */
   private readonly entries = computed<readonly StageEntry[]>(() => {
     const kept = stageEntriesOf(this.store.settings()?.stages?.parts ?? [], this.formats.locale());
