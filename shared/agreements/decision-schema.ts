@@ -4,6 +4,8 @@ import * as z from 'zod';
 export const decisionSchema = z.strictObject({
   id: z.uuid(),
   issueId: z.uuid(),
+  /** What was decided on, as papers name it, with its letter. */
+  number: z.string(),
   kind: z.enum(['accepted', 'declined']),
   typedName: z.string(),
   at: z.string(),

@@ -45,7 +45,7 @@ export const agreementRoutes = ({ access, questions, contracts, named, papers, v
     const contract = await contracts.contract(actor.workshopId, params.jobId);
     return {
       contract: contract ? presentContract(contract) : null,
-      decisions: decisions.map(({ row, names }) => presentDecision(row, names)),
+      decisions: decisions.map(presentDecision),
     };
   }),
   mount(readAcceptedPaper, ({ actor, params }) => papers.read(actor.workshopId, params.decisionId)),

@@ -1,15 +1,16 @@
 import type { Decision } from '#shared/agreements/decision-schema';
-import type { DecisionRow } from './decision-model';
+import type { NamedDecision } from './named-decisions';
 
-export const presentDecision = (row: DecisionRow, alternatives: readonly string[]): Decision => ({
+export const presentDecision = ({ row, number, names }: NamedDecision): Decision => ({
   id: row.id,
   issueId: row.issueId,
+  number,
   kind: row.kind,
   typedName: row.typedName,
   at: row.at.toISOString(),
   address: row.address,
   choice: [...row.choice],
-  alternatives: [...alternatives],
+  alternatives: [...names],
   reason: row.reason,
   net_minor: row.netMinor,
   tax_minor: row.taxMinor,

@@ -10,14 +10,30 @@ const job = { id: id(10), changedAt: '2026-03-02T10:00:00.000Z' };
 const plan = { deposit_percent: '40', stages_percent: ['60'], retention_percent: '0' };
 const part = (number: string, kind: 'estimate' | 'variation', net_minor: number) => ({
   ...{ issueId: id(20), estimateId: id(21), kind, number, title: `Pier table ${number}`, acceptedOn: '2026-03-02' },
-  ...{ choice: [], taxes: [], exemptions: [], net_minor, tax_minor: 0, gross_minor: net_minor, plan, stageNames: ['Delivery'] },
+  ...{
+    choice: [],
+    taxes: [],
+    exemptions: [],
+    net_minor,
+    tax_minor: 0,
+    gross_minor: net_minor,
+    plan,
+    stageNames: ['Delivery'],
+  },
 });
 const contract = (...parts: ReturnType<typeof part>[]) => ({
   ...{ jobId: job.id, clientId: id(30), currency: 'EUR', parts },
   ...{ net_minor: 5_400_00, tax_minor: 1_242_00, gross_minor: 6_642_00 },
 });
 const decision = {
-  ...{ id: id(40), issueId: id(20), kind: 'accepted', typedName: 'Helena Marsh', at: '2026-03-02T10:30:00.000Z' },
+  ...{
+    id: id(40),
+    issueId: id(20),
+    number: '2026-014-1 A',
+    kind: 'accepted',
+    typedName: 'Helena Marsh',
+    at: '2026-03-02T10:30:00.000Z',
+  },
   ...{ address: '203.0.113.7', choice: [], alternatives: [], reason: '', net_minor: 5_000_00, tax_minor: 1_150_00 },
   ...{ gross_minor: 6_150_00, pdfSha256: 'ab'.repeat(32) },
 };
@@ -57,7 +73,13 @@ describe('JobAgreement', () => {
 
   it('tells who accepted, when and from where, with the very paper and its fingerprint', async () => {
     const widget = await open({ agreement: { contract: null, decisions: [decision] } });
-    for (const text of ['Accepted by Helena Marsh, €6,150.00 with tax', '10:30', '203.0.113.7', 'ab'.repeat(32)])
+    for (const text of [
+      'Accepted by Helena Marsh, €6,150.00 with tax',
+      '2026-014-1 A',
+      '10:30',
+      '203.0.113.7',
+      'ab'.repeat(32),
+    ])
       expect(widget.text).toContain(text);
     expect(widget.text).not.toContain('Chosen');
     expect(widget.element.querySelector('a')?.getAttribute('href')).toBe(`/api/decisions/${id(40)}/estimate.pdf`);
@@ -72,7 +94,7 @@ describe('JobAgreement', () => {
   it('tells why it was declined', async () => {
     const declined = { ...decision, kind: 'declined', reason: 'Too late for us.', pdfSha256: '' };
     const widget = await open({ agreement: { contract: null, decisions: [declined] } });
-    expect(widget.text).toContain('DeclinedToo late for us.');
+    expect(widget.text).toContain('Declined 2026-014-1 AToo late for us.');
     expect(widget.element.querySelector('a')).toBeNull();
   });
 
