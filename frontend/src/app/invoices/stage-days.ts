@@ -25,7 +25,11 @@ export interface NamedDay {
     </label>
     @if (mayBeReached()) {
       <label>
-        <span class="muted" i18n>reached</span>
+        @if (isReleased()) {
+          <span class="muted" i18n>due back</span>
+        } @else {
+          <span class="muted" i18n>reached</span>
+        }
         <span class="visually-hidden">{{ title() }}</span>
         <input
           #reached
@@ -68,6 +72,8 @@ export class StageDays {
   readonly plannedOn = input.required<string | null>();
   readonly reachedOn = input.required<string | null>();
   readonly mayBeReached = input.required<boolean>();
+  /** What was held back falls due, it is not reached. */
+  readonly isReleased = input(false);
   readonly named = output<NamedDay>();
 
   protected readonly today = workshopToday();
