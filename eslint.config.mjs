@@ -85,12 +85,8 @@ const projectOf = (files, ...projects) => ({
 
 const typed = [
   projectOf(['backend/**/*.ts', 'shared/**/*.ts', 'seeders/**/*.ts', 'test/**/*.ts'], './backend/tsconfig.json'),
-  {
-    ...projectOf(['frontend/**/*.ts'], './frontend/tsconfig.app.json'),
-    ignores: ['**/*-worker.ts', ...specs, 'frontend/src/test/**'],
-  },
+  projectOf(['frontend/**/*.ts'], './frontend/tsconfig.spec.json'),
   projectOf(['frontend/**/*-worker.ts'], './frontend/tsconfig.worker.json'),
-  projectOf(['frontend/**/*.spec.ts', 'frontend/src/test/**/*.ts'], './frontend/tsconfig.spec.json'),
 ];
 
 const limits = {

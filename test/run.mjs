@@ -38,7 +38,7 @@ const npm = process.env.npm_execpath ? [process.execPath, process.env.npm_execpa
 async function check(script) {
   const report = join(root, '.cache', `${script.replaceAll(':', '-')}.txt`);
   const said = openSync(report, 'w');
-  const code = await run([...npm, 'run', '--silent', script], 10, said);
+  const code = await run([...npm, 'run', '--silent', script], 15, said);
   closeSync(said);
   say(script);
   process.stdout.write(readFileSync(report));
@@ -71,7 +71,7 @@ const hasSpecs = (folder) =>
 async function runAll() {
   const later = onTheBuiltApplication.filter(hasSpecs);
   mkdirSync(join(root, '.cache'), { recursive: true });
-  const results = await Promise.all(['check:types', 'check:lint', 'check:layers'].map(check));
+  const results = await Promise.all(['check:types', 'check:lint', 'check:layers', 'build'].map(check));
   results.push(await jest('specifications', later.length > 0 ? ['--ignoreProjects', ...later] : [], 20));
   if (later.length > 0) results.push(await jest('the built application', ['--selectProjects', ...later], 20));
   return results;

@@ -13,7 +13,12 @@ const say = (text) => console.log(text);
 
 const programs = [
   { debian: 'mariadb-server', command: 'mariadbd', use: 'keeps the workshop’s records', always: true },
-  { debian: 'chromium', command: 'chromium', use: 'opens the pages in tests', always: false },
+  {
+    debian: 'chromium-headless-shell',
+    command: 'chromium-headless-shell',
+    use: 'opens the pages in tests',
+    always: false,
+  },
   { debian: 'poppler-utils', command: 'pdftotext', use: 'reads the papers in tests', always: false },
 ];
 

@@ -1,3 +1,5 @@
+import { Agent, createServer } from 'node:http';
+import type { AddressInfo } from 'node:net';
 import type { Express } from 'express';
 import request, { type Response, type Test } from 'supertest';
 import { signIn, readSession } from '#shared/accounts/session-endpoints';
@@ -16,6 +18,23 @@ export interface Parts {
 
 type Method = Endpoint['method'];
 
+/** Connections stay open between requests, as a browser's do: a new server and a new connection for each would take as long as the answer. */
+const agent = new Agent({ keepAlive: true });
+const doors = new WeakMap<Express, string>();
+
+/** Where an application listens, from its first visitor on; nothing of it keeps the process alive. */
+function doorOf(express: Express): string {
+  const known = doors.get(express);
+  if (known) return known;
+  const server = createServer(express).listen(0).unref();
+  // It closes none by itself: the next request might be on its way just then.
+  server.keepAliveTimeout = 0;
+  server.on('connection', (socket) => socket.unref());
+  const door = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;
+  doors.set(express, door);
+  return door;
+}
+
 /** Somebody with a browser: keeps the cookie, and the token that answers about the session bring. */
 export class Visitor {
   token = '';
@@ -28,7 +47,7 @@ export class Visitor {
 
   /** A request with the cookie and without the token. A cookie is kept whatever its address, as if https were before the server. */
   request(method: Method, path: string): Test {
-    const test = request(this.express)[method](path).set(this.headers);
+    const test = request(doorOf(this.express))[method](path).agent(agent).set(this.headers);
     if (this.cookie) test.set('cookie', this.cookie);
     test.on(
       'response',

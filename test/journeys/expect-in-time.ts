@@ -1,6 +1,6 @@
-/** Reads until it is as it should be, ten seconds at most; what it came to then is what is judged. */
+/** Reads until it is as it should be, half a minute at most; what it came to then is what is judged. */
 async function inTime<T>(read: () => Promise<T>, wanted: T): Promise<T> {
-  for (let tries = 0; tries < 50; tries++) {
+  for (let tries = 0; tries < 150; tries++) {
     const present = await read();
     if (JSON.stringify(present) === JSON.stringify(wanted)) return present;
     await new Promise((resolve) => setTimeout(resolve, 200));

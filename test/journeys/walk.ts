@@ -48,7 +48,7 @@ export class Walk {
     const api = await startApi({ WEB_DIR: join(root, 'dist/web') });
     const server = createServer(api.app.web.express);
     await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
-    const browser = await chromium.launch({ executablePath: '/usr/bin/chromium', args: quiet });
+    const browser = await chromium.launch({ executablePath: '/usr/bin/chromium-headless-shell', args: quiet });
     if (pictures) mkdirSync(pictures, { recursive: true });
     return new Walk(api, server, browser);
   }
