@@ -27,6 +27,12 @@ describe('WhatIfPanel', () => {
     }
   };
 
+  /** When what is asked is planned from. */
+  let from_minutes = 0;
+  beforeEach(() => {
+    from_minutes = 0;
+  });
+
   /** Another way costs 120 more, and whoever is there besides is really there. */
   function whatIf({ body }: AskedParts): unknown {
     const { furtherGradeIds, climate } = body as WhatIf;
@@ -46,7 +52,7 @@ describe('WhatIfPanel', () => {
         digits: 2,
         overtime_percent: 50,
       },
-      request: { ...request, lags, people: [...request.people, ...further] },
+      request: { ...request, start_minutes: from_minutes, lags, people: [...request.people, ...further] },
       ...{ cost_minor: isOther ? 112_000 : 100_000, costDifference_minor: isOther ? 12_000 : 0 },
       ...{ gross_minor: 150_000, grossDifference_minor: 0 },
     };
@@ -116,6 +122,17 @@ describe('WhatIfPanel', () => {
     await settle();
     expect(server.of('readWhatIf').map(({ body }) => (body as WhatIf).day)).toEqual([null, '2027-01-27']);
     expect(rows()[1][0]).toMatch(/^Wanted by Wed,? 27 Jan$/);
+  });
+
+  it('says that work which should have begun is still to be done, where as it is ends later than what is kept', async () => {
+    await open();
+    buttonIn(element(), 'Compare').click();
+    await settle();
+    expect(spoken(element())).not.toContain('still to be done');
+    from_minutes = 3 * 1440;
+    buttonIn(element(), 'Compare').click();
+    await settle();
+    expect(spoken(element())).toContain('was not marked is still to be done, in each of these ways.');
   });
 
   it('is never later with one more pair of hands', async () => {

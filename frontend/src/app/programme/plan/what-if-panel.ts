@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, inject, input, linkedSign
 import { MatButton } from '@angular/material/button';
 import { addDays } from '#shared/calendar/add-days';
 import type { Climate } from '#shared/drying/climate';
+import { millisecondsOf } from '#shared/programme/programme-frame';
 import { Formats } from '../../core/formats/formats';
 import { Words } from '../../core/formats/words';
 import { Planner } from './planner';
@@ -69,6 +70,14 @@ export class WhatIfPanel {
   protected readonly lines = computed(() => {
     const ways = this.comparison.ways();
     return ways.map((way) => this.line(way, ways[0]));
+  });
+
+  /** As it is ends later than what is kept says, since something of that is behind. */
+  protected readonly isBehind = computed(() => {
+    const [answer, frame, first] = [this.store.answer(), this.store.frame(), this.comparison.ways().at(0)];
+    const kept = answer?.isCurrent ? answer.plan?.finish_minutes : undefined;
+    if (!frame || !first?.readyAt || kept === undefined || kept === null) return false;
+    return Date.parse(first.readyAt) > millisecondsOf(kept, frame);
   });
 
   protected isOn(way: Way): boolean {
