@@ -77,6 +77,10 @@ describe('Accepting', () => {
     const readers = mails.map(({ headers }) => /^To: .*<(.*)>/m.exec(headers)?.[1]).sort();
     expect(readers).toEqual([email, api.ours.people.owner.email].sort());
     expect((await pageOf(visitor, sample.issueId)).decision).toMatchObject({ kind: 'accepted', pdfSha256 });
+    const { body } = await api.as('office').call(readAgreement, { params: { jobId: sample.jobId } });
+    const [told] = (body as { decisions: { number: string; alternatives: string[] }[] }).decisions;
+    expect(told.number).toMatch(/-1, issue A$/);
+    expect(told.alternatives).toHaveLength(2);
   });
 
   it('shows in the history of the job by the client’s name and nobody’s account', async () => {
