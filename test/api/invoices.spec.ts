@@ -304,6 +304,20 @@ describe('invoices of a contract', () => {
     expect(await contractFaults(api.app, database)).toEqual([]);
   });
 
+  it('whose plan would not come to the whole are seen as well', async () => {
+    const { jobId, issueId } = await acceptedIssue(api.ours, api);
+    const { contracts } = api.app.agreements;
+    const read = contracts.contract.bind(contracts);
+    contracts.contract = async (workshopId, asked) => {
+      const contract = await read(workshopId, asked);
+      if (!contract || asked !== jobId) return contract;
+      const parts = contract.parts.map((part) => ({ ...part, plan: { ...part.plan, stages_percent: [40, 59] } }));
+      return { ...contract, parts };
+    };
+    const faults = await contractFaults(api.app, api.platform.database).finally(() => (contracts.contract = read));
+    expect(faults).toEqual([expect.stringMatching(new RegExp(`^the plan of ${issueId} comes to \\d+, not \\d+$`))]);
+  });
+
   it('fall due as the review promised, and bear the reason why nothing is charged that was frozen with the issue', async () => {
     const sample = await sampleEstimate(api.ours);
     const { estimateId, jobId } = sample;

@@ -1,3 +1,6 @@
+import type { ContractPart } from '#shared/agreements/contract';
+import { claimedDue, type PlannedClaim } from '#shared/invoices/stage-claim';
+import { cumulativePercents } from '#shared/money/cumulative-parts';
 import type { App } from '../../backend/src/app';
 import type { Database } from '../../backend/src/platform/database/database';
 
@@ -99,23 +102,41 @@ const agreedParts = `
   WHERE s.state = 'accepted'
   GROUP BY s.workshop_id, e.job_id, s.id, d.gross_minor, s.gross_minor`;
 
+/** What the plan of a part foresees, with tax: the deposit, every stage by itself, and both releases of what is held back. */
+function foreseen(part: ContractPart): number {
+  const ends = ['0', ...cumulativePercents(part.plan.stages_percent).map(String)];
+  const stages = ends
+    .slice(1)
+    .map((to_percent, place): PlannedClaim => ({ of: 'work', from_percent: ends[place], to_percent }));
+  const claims: PlannedClaim[] = [{ of: 'deposit' }, ...stages, { of: 'first-release' }, { of: 'second-release' }];
+  return claims.reduce((sum, claim) => sum + claimedDue(part, claim), 0);
+}
+
 /**
- * What contracts and their invoices say that does not agree: of every accepted part, its gross = invoiced − credited + what its account says
- * is left, where credit notes of what a variation takes away count with the variation; where no claim is open or drafted, and wherever the
+ * What contracts and their invoices say that does not agree: of every accepted part, its gross = deposit + stages + retention as its plan
+ * foresees them = invoiced − credited + what its account says is left, where credit notes of what a variation takes away count with the variation; where no claim is open or drafted, and wherever the
  * account calls it complete, nothing is left; and no contract is below nothing.
  */
 export async function contractFaults(app: App, database: Database): Promise<string[]> {
   const agreed = await database.select<AgreedPart>(agreedParts);
   const accounts = new Map<string, Awaited<ReturnType<App['invoices']['stages']['account']>>>();
-  for (const { workshopId, jobId } of agreed)
-    if (!accounts.has(jobId)) accounts.set(jobId, await app.invoices.stages.account(workshopId, jobId));
+  const plans = new Map<string, ContractPart>();
+  for (const { workshopId, jobId } of agreed) {
+    if (accounts.has(jobId)) continue;
+    accounts.set(jobId, await app.invoices.stages.account(workshopId, jobId));
+    const contract = await app.agreements.contracts.contract(workshopId, jobId);
+    for (const part of contract?.parts ?? []) plans.set(part.issueId, part);
+  }
   const below = [...accounts].filter(([, account]) => (account?.gross_minor ?? 0) < 0).map(([jobId]) => jobId);
   const faults = agreed.flatMap(({ jobId, issueId, ...one }) => {
     const part = accounts.get(jobId)?.parts.find((among) => among.issueId === issueId);
-    if (!part) return [`the accepted issue ${issueId} is no part of the contract of its job`];
+    const plan = plans.get(issueId);
+    if (!part || !plan) return [`the accepted issue ${issueId} is no part of the contract of its job`];
     const left = Number(one.gross) - Number(one.standing);
     const isDone = part.next.length === 0 && Number(one.drafts) === 0;
+    const planned = foreseen(plan);
     return [
+      ...(planned === Number(one.gross) ? [] : [`the plan of ${issueId} comes to ${planned}, not ${one.gross}`]),
       ...(left === part.left_minor ? [] : [`of ${issueId} ${left} is left, not ${part.left_minor}`]),
       ...((isDone || part.isComplete) && left !== 0 ? [`all of ${issueId} is invoiced, but for ${left}`] : []),
       ...(isDone === part.isComplete ? [] : [`${issueId} is ${part.isComplete ? '' : 'not '}called complete`]),
