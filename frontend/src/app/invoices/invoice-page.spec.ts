@@ -207,6 +207,18 @@ describe('InvoicePage, issued', () => {
     expect(visit.text).toContain('Agreed by telephone 1 Apr 2026, Orla−€5.00');
   });
 
+  it.each([
+    ['while some is left', 1, true],
+    ['never once all of it was written off', 0, false],
+  ])('offers to credit it %s', async (_, left_minor, isOffered) => {
+    const whole = sampleInvoice();
+    const writeOff = { id: invoiceId(50), reason: 'Moved away', writtenOn: '2026-04-01', byName: 'Orla' };
+    const amount_minor = whole.due_minor - whole.credited_minor - left_minor;
+    const visit = await begin({ ...whole, open_minor: left_minor, writeOffs: [{ ...writeOff, amount_minor }] });
+    await related(visit);
+    expect(visit.button('Begin a credit note') !== undefined).toBe(isOffered);
+  });
+
   it('offers writing off to the owner alone, and a reminder only once it is overdue', async () => {
     const office = await begin(sampleInvoice());
     await related(office);

@@ -5,6 +5,7 @@ import { exemptionOf } from '#shared/invoices/exemption-of';
 import type { Invoice, InvoicePaper } from '#shared/invoices/invoice-schema';
 import { readInvoicePaper } from '#shared/invoices/invoices-endpoints';
 import { currencyDigits } from '#shared/money/currency-digits';
+import { sumMinor } from '#shared/money/sum-minor';
 import { addressOf } from '../core/api/address-of';
 import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
@@ -54,9 +55,12 @@ export class InvoiceView {
   protected readonly isOwed = computed(() => this.isIssued() && this.isInvoice() && this.invoice().open_minor > 0);
   protected readonly mayAct = computed(() => this.session.may('owner', 'office') && this.isIssued());
   protected readonly mayWriteOff = computed(() => this.session.may('owner') && this.isOwed());
-  protected readonly mayCredit = computed(
-    () => this.mayAct() && this.isInvoice() && this.invoice().credited_minor < this.invoice().due_minor,
-  );
+  /** What was written off cannot be credited as well. */
+  private readonly creditable_minor = computed(() => {
+    const { due_minor, credited_minor, writeOffs } = this.invoice();
+    return sumMinor([due_minor, -credited_minor, ...writeOffs.map(({ amount_minor }) => -amount_minor)]);
+  });
+  protected readonly mayCredit = computed(() => this.mayAct() && this.isInvoice() && this.creditable_minor() > 0);
   protected readonly papers = computed(() => {
     const { id, papers } = this.invoice();
     return papers.map((paper) => ({
