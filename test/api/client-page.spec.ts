@@ -17,7 +17,8 @@ import type { ClientOverview } from '#shared/client-page/client-overview-schema'
 import type { ClientPrice } from '#shared/client-page/client-price-schema';
 import { askForClientSignIn, beginClientVisit } from '#shared/client-page/visits-endpoints';
 import { endpoints } from '#shared/endpoints';
-import { markIssue } from '#shared/estimates/issues-endpoints';
+import type { AlternativeTotal } from '#shared/estimates/alternative-total';
+import { markIssue, readIssue } from '#shared/estimates/issues-endpoints';
 import {
   acceptanceOf,
   clientOf,
@@ -277,6 +278,12 @@ describe('The page of an issue', () => {
     expect(oil.gross_minor).toBe(price.gross_minor + oil.difference_minor);
     // 180.00 and 20 % tax.
     expect(crate.difference_minor).toBe(21_600);
+    const { body } = await api.as('office').call(readIssue, { params: { issueId: sample.issueId } });
+    const [kept] = (body as { alternatives: AlternativeTotal[] }).alternatives;
+    const names = (sections: readonly { buildUp: string }[] = []) => sections.map(({ buildUp }) => buildUp);
+    expect(names(kept.sections?.before)).toEqual(names(oil.before));
+    expect(names(kept.sections?.after)).toEqual(names(oil.after));
+    expect(kept.sections?.after.every(({ timber, leaf }) => timber !== '' && leaf.length === 1)).toBe(true);
   });
 
   it('prices every combination there is with lines and totals that add up, one alternative alone as it is offered', async () => {
