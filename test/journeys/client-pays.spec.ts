@@ -12,15 +12,6 @@ afterAll(() => walk.end());
 
 const phone = { width: 360, height: 740, touch: true } as const;
 
-/** Payers come back to the address the server was given; the walk has it on a port of its own. */
-async function comesBackHere({ context }: Person): Promise<void> {
-  await context.route(/\/client\/payments\//, async (route) => {
-    const { origin, pathname } = new URL(route.request().url());
-    if (origin === walk.address) return route.continue();
-    await route.fulfill({ status: 302, headers: { location: walk.address + pathname } });
-  });
-}
-
 const atTheStandIn = ({ page }: Person) =>
   page.getByRole('heading', { name: 'Standing in for the payment page' }).waitFor();
 
@@ -31,7 +22,6 @@ it('accepts, pays the deposit, gets the receipt, and it stands in the accounts',
   const { token } = await linkTo(walk.api.ours, walk.api, issueId);
   const client = await clientAt(walk, `${walk.address}/client#${token}`, phone);
   const { page } = client;
-  await comesBackHere(client);
   await reviewAs(page, 'Helena Marsh');
   await page.getByRole('button', { name: 'Accept', exact: true }).tap();
   await page.getByText(/Accepted by Helena Marsh/).waitFor();

@@ -45,9 +45,12 @@ export class Walk {
   }
 
   static async begin(): Promise<Walk> {
-    const api = await startApi({ WEB_DIR: join(root, 'dist/web') });
-    const server = createServer(api.app.web.express);
+    const server = createServer();
     await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
+    // It knows its port, for what leads back to it from elsewhere.
+    const { port } = server.address() as AddressInfo;
+    const api = await startApi({ WEB_DIR: join(root, 'dist/web'), PORT: String(port) });
+    server.on('request', api.app.web.express);
     const browser = await chromium.launch({ executablePath: '/usr/bin/chromium-headless-shell', args: quiet });
     if (pictures) mkdirSync(pictures, { recursive: true });
     return new Walk(api, server, browser);
