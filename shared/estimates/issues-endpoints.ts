@@ -34,7 +34,7 @@ export const issueEstimate = endpoint({
   params: oneEstimate,
   body: issueRequestSchema,
   idempotent: true,
-  atOnce: 2,
+  atOnce: 1,
   answers: { cost: pricedIssueSummarySchema },
 });
 
