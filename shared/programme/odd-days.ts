@@ -1,5 +1,6 @@
 import { addDays } from '#shared/calendar/add-days';
 import { type Day, dayNumber } from '#shared/calendar/day';
+import { Remembered } from '#shared/units/remembered';
 
 const day_ms = 86_400_000;
 const minute_ms = 60_000;
@@ -58,17 +59,11 @@ interface OddDay {
 }
 
 /** Asked for every plan of a day anew, and always the same: what was found last is kept. */
-const found = new Map<string, readonly OddDay[]>();
-const mostFound = 64;
+const found = new Remembered<readonly OddDay[]>(64);
 
 /** The days of another length than 24 hours among so many from a first one on, because the clocks change; lengths in minutes. */
-export function oddDays(firstDay: Day, days: number, timeZone: string): readonly OddDay[] {
-  const key = `${firstDay} ${days} ${timeZone}`;
-  const odd = found.get(key) ?? oddDaysLookedUp(firstDay, days, timeZone);
-  if (found.size >= mostFound) found.clear();
-  found.set(key, odd);
-  return odd;
-}
+export const oddDays = (firstDay: Day, days: number, timeZone: string): readonly OddDay[] =>
+  found.of(`${firstDay} ${days} ${timeZone}`, () => oddDaysLookedUp(firstDay, days, timeZone));
 
 function oddDaysLookedUp(firstDay: Day, days: number, timeZone: string): OddDay[] {
   const odd: OddDay[] = [];

@@ -1,5 +1,6 @@
 import { figureWriters } from '#shared/units/figure-writers';
 import { penFor, type ReaderSettings } from '#shared/units/pen';
+import { Remembered } from '#shared/units/remembered';
 import type { ValueFormats } from '#shared/words/say';
 
 const formatsOf = (settings: ReaderSettings): ValueFormats => {
@@ -10,8 +11,7 @@ const formatsOf = (settings: ReaderSettings): ValueFormats => {
 };
 
 /** Making formats is slow and using them is quick: those of the readers of late are kept. */
-const known = new Map<string, ValueFormats>();
-const mostKnown = 100;
+const known = new Remembered<ValueFormats>(100);
 
 /**
  * How figures are written for a reader, by the ending of a value's name: mm, mm2, minor, rate_minor, hours, minutes, days, percent, celsius, µm, grams,
@@ -21,8 +21,5 @@ export function formatsFor(settings: ReaderSettings): ValueFormats {
   const { locale, currency, digits, lengthUnit, catalogue } = settings;
   if (catalogue) return formatsOf(settings);
   const key = [locale, currency, digits, lengthUnit].join(' ');
-  const formats = known.get(key) ?? formatsOf(settings);
-  if (known.size >= mostKnown) known.clear();
-  known.set(key, formats);
-  return formats;
+  return known.of(key, () => formatsOf(settings));
 }

@@ -1,7 +1,7 @@
 import { existsSync, readFileSync, readdirSync } from 'node:fs';
 import * as path from 'node:path';
 import { brotliCompressSync, gzipSync } from 'node:zlib';
-import { chromium } from 'playwright-core';
+import { openBrowser } from '../journeys/open-browser';
 import type { Benchmark, Measure } from './benchmark';
 import { servedFiles } from './served-files';
 
@@ -16,7 +16,7 @@ const fontFiles = (): string[] => readdirSync(fonts).map((name) => path.join(fon
 /** What a phone asks for that opens the link of a letter: the page names the files of an estimate from the start. */
 async function filesOfFirstVisit(): Promise<readonly string[]> {
   const served = await servedFiles(builtPage);
-  const browser = await chromium.launch({ executablePath: '/usr/bin/chromium-headless-shell', args: ['--no-sandbox'] });
+  const browser = await openBrowser();
   try {
     const page = await browser.newPage({ viewport: { width: 390, height: 844 } });
     await page.goto(`${served.address}/client#a-secret`, { waitUntil: 'networkidle' });

@@ -1,7 +1,7 @@
 import { existsSync, readFileSync } from 'node:fs';
 import * as path from 'node:path';
 import { brotliCompressSync, gzipSync } from 'node:zlib';
-import { chromium } from 'playwright-core';
+import { openBrowser } from '../journeys/open-browser';
 import type { Benchmark, Measure } from './benchmark';
 import { servedFiles } from './served-files';
 
@@ -15,7 +15,7 @@ const kilobytes = (bytes: readonly number[]): number => bytes.reduce((sum, size)
 /** The files a browser that was never here asks for, until the page of signing in stands and nothing more is asked. */
 async function filesOfFirstVisit(): Promise<readonly string[]> {
   const served = await servedFiles(builtPage);
-  const browser = await chromium.launch({ executablePath: '/usr/bin/chromium-headless-shell', args: ['--no-sandbox'] });
+  const browser = await openBrowser();
   try {
     const page = await browser.newPage();
     await page.goto(`${served.address}/sign-in`, { waitUntil: 'networkidle' });

@@ -2,26 +2,16 @@ import { mkdirSync } from 'node:fs';
 import { createServer, type Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import { join } from 'node:path';
-import { chromium, type Browser, type BrowserContext, type Page } from 'playwright-core';
+import type { Browser, BrowserContext, Page } from 'playwright-core';
 import { noteCookie } from '../api/faults-of-log';
 import { startApi, type Api } from '../api/start-api';
 import { password } from '../api/test-workshop';
+import { openBrowser } from './open-browser';
 import { desk, type Screen } from './screens';
 
 const root = join(__dirname, '../..');
 /** Pictures are kept for somebody who wants to look at them and says so (`PICTURES=1`): of a whole run nobody would. */
 const pictures = process.env['PICTURES'] ? join(__dirname, 'screenshots') : undefined;
-
-/** What keeps Chromium to itself: it asks nobody but us. */
-const quiet = [
-  '--no-sandbox',
-  '--disable-gpu',
-  '--disable-quic',
-  '--no-first-run',
-  '--disable-background-networking',
-  '--disable-component-update',
-  '--disable-sync',
-];
 
 /** Somebody at a browser of their own. `complaints` gathers what the browser objected to. */
 export interface Person {
@@ -51,7 +41,7 @@ export class Walk {
     const { port } = server.address() as AddressInfo;
     const api = await startApi({ WEB_DIR: join(root, 'dist/web'), PORT: String(port) });
     server.on('request', api.app.web.express);
-    const browser = await chromium.launch({ executablePath: '/usr/bin/chromium-headless-shell', args: quiet });
+    const browser = await openBrowser();
     if (pictures) mkdirSync(pictures, { recursive: true });
     return new Walk(api, server, browser);
   }

@@ -1,30 +1,24 @@
 import type { Figures } from '#shared/estimates/figures';
 import { Rejection } from '#shared/problems/rejection';
+import { Remembered } from '#shared/units/remembered';
 import type { ClientIssueRows } from '../agreements';
 import type { Estimates } from '../estimates';
 import { presentClientFrozen, type ClientFrozen } from './client-frozen-presenter';
-
-/** So many issues are kept ready; the one that was read longest ago gives way. */
-const most = 200;
 
 /**
  * What an issue froze, as its client reads it. Working its alternatives takes as long as working the estimate so many times, and gives the
  * same to every reader: it is done once, and kept by the fingerprint of what was frozen.
  */
 export class FrozenIssuePages {
-  private readonly pages = new Map<string, Promise<ClientFrozen>>();
+  private readonly pages = new Remembered<Promise<ClientFrozen>>(200);
 
   constructor(private readonly frozen: Pick<Estimates['frozen'], 'chosen'>) {}
 
   /** The page of an issue its reader may see: whether they may is asked before. */
   of(issue: ClientIssueRows): Promise<ClientFrozen> {
     const key = `${issue.row.workshopId} ${issue.row.id} ${issue.row.sha256}`;
-    const page = this.pages.get(key) ?? this.made(issue);
-    this.pages.delete(key);
-    this.pages.set(key, page);
-    page.catch(() => this.pages.delete(key));
-    const [oldest] = this.pages.keys();
-    if (this.pages.size > most && oldest !== undefined) this.pages.delete(oldest);
+    const page = this.pages.of(key, () => this.made(issue));
+    page.catch(() => this.pages.forget(key));
     return page;
   }
 

@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto';
 import { gunzipSync, gzipSync } from 'node:zlib';
 import { canonicalJson } from '#shared/estimates/canonical-json';
 import type { Snapshot } from '#shared/estimates/snapshot';
+import { Remembered } from '#shared/units/remembered';
 import type { EstimateRow } from './estimate-model';
 import type { IssueRow } from './issue-model';
 import { upgradedSnapshot } from './upgraded-snapshot';
@@ -22,16 +23,11 @@ export function thawedSnapshot(row: Pick<IssueRow, 'snapshot' | 'sha256' | 'id'>
 }
 
 /** Titles by the hash of what was frozen, which never changes: lists of many issues need nothing else of them. */
-const titles = new Map<string, string>();
-const mostTitles = 20_000;
+const titles = new Remembered<string>(20_000);
 
 /** What an issue was called when it was issued. */
-export function titleOfIssue(row: Pick<IssueRow, 'snapshot' | 'sha256' | 'id'>): string {
-  const title = titles.get(row.sha256) ?? thawedSnapshot(row).draft.settings.title;
-  if (titles.size >= mostTitles) titles.clear();
-  titles.set(row.sha256, title);
-  return title;
-}
+export const titleOfIssue = (row: Pick<IssueRow, 'snapshot' | 'sha256' | 'id'>): string =>
+  titles.of(row.sha256, () => thawedSnapshot(row).draft.settings.title);
 
 /** A frozen estimate put as the tables would hold it, so that one presenter serves drafts and issues. */
 export function wholeOfSnapshot(

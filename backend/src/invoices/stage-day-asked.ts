@@ -1,4 +1,5 @@
 import type { ContractPart } from '#shared/agreements/contract';
+import { mayBeReached } from '#shared/invoices/may-be-reached';
 import type { StageClaim } from '#shared/invoices/stage-claim';
 import { stageOfClaim } from '#shared/invoices/stage-of-claim';
 import { Rejection } from '#shared/problems/rejection';
@@ -12,10 +13,9 @@ export interface StageDayAsked {
   readonly day: string | null;
 }
 
-/** What waits for a milestone is reached, or comes to be released; a deposit falls due on acceptance, and what is credited at any time. */
+/** Only what waits for something is reached, and on no day that is still to come. */
 export function mustBeReachable({ gross_minor }: ContractPart, { claim, day }: StageDayAsked, today: string): void {
-  const waits = gross_minor > 0 && claim.of !== 'deposit' && claim.of !== 'again';
-  if (!waits) throw new Rejection('conflict', 'invoice-stage-waits-for-nothing');
+  if (!mayBeReached({ claim, gross_minor })) throw new Rejection('conflict', 'invoice-stage-waits-for-nothing');
   if (day === null || day <= today) return;
   const complaints = [{ path: ['body', 'day'], code: 'invoice-reached-late' as const, values: {} }];
   throw new Rejection('invalid', 'problem-invalid', { complaints });

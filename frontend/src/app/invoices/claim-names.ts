@@ -21,7 +21,3 @@ export function claimName(
       return $localize`Work from ${formats.number(Number(claim.from_percent))}:from: to ${formats.figure('percent', Number(claim.to_percent))}:to:`;
   }
 }
-
-/** Whether a claim waits for something that is reached one day: a deposit falls due on acceptance, the rest at any time. */
-export const mayBeReached = ({ claim, gross_minor }: { claim: StageClaim; gross_minor: number }): boolean =>
-  gross_minor > 0 && claim.of !== 'deposit' && claim.of !== 'again';

@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/c
 import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
 import type { DueStage } from '#shared/invoices/due-stages-endpoints';
+import { mayBeReached } from '#shared/invoices/may-be-reached';
 import { Formats } from '../core/formats/formats';
 import { PagedList } from '../core/lists/paged-list';
 import { ListBody } from '../jobs';
@@ -46,7 +47,7 @@ export class DueStagesPage {
   private whenOf(stage: DueStage): string {
     if (stage.isReached && stage.dueOn !== null) return this.reached(stage, this.formats.day(stage.dueOn));
     if (stage.dueOn !== null) return this.formats.day(stage.dueOn);
-    if (stage.gross_minor < 0 || stage.claim.of === 'again') return $localize`at any time`;
+    if (!mayBeReached(stage)) return $localize`at any time`;
     return stage.claim.of === 'work' ? $localize`when it is reached` : $localize`when it is due back`;
   }
 

@@ -2,13 +2,14 @@ import { ChangeDetectionStrategy, Component, computed, inject, input, resource, 
 import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
 import type { ContractAccountAnswer } from '#shared/invoices/contract-account-endpoints';
+import { mayBeReached } from '#shared/invoices/may-be-reached';
 import type { StageClaim } from '#shared/invoices/stage-claim';
 import type { Job } from '#shared/jobs/job-schema';
 import { Formats } from '../core/formats/formats';
 import { Notices } from '../core/problems/notices';
 import { ProblemError } from '../core/problems/problem-error';
 import { Session } from '../core/session/session';
-import { claimName, mayBeReached } from './claim-names';
+import { claimName } from './claim-names';
 import { InvoiceCalls } from './invoice-calls';
 import { invoiceKindNames } from './invoice-names';
 import { StageDays, type NamedDay } from './stage-days';

@@ -5,6 +5,7 @@ import { signIn, words } from '../../../test/sign-in';
 import { Notices } from '../../core/problems/notices';
 import { Confirm } from '../../ui/dialog/confirm';
 import { AnsweringForSpecs, buttonIn, refusal, spoken } from '../answering-for-specs';
+import { settledForSpecs } from '../settled-for-specs';
 import { CalendarFeeds } from './calendar-feeds';
 
 const feed = {
@@ -18,13 +19,7 @@ describe('CalendarFeeds', () => {
   let server: AnsweringForSpecs;
   let copied: string[];
   const element = () => fixture.nativeElement as HTMLElement;
-  const settle = async () => {
-    for (let turn = 0; turn < 4; turn += 1) {
-      await fixture.whenStable();
-      await new Promise((resolve) => setTimeout(resolve));
-      TestBed.tick();
-    }
-  };
+  const settle = () => settledForSpecs(fixture);
   const press = async (text: string) => {
     buttonIn(element(), text).click();
     await settle();

@@ -2,6 +2,7 @@ import { TestBed } from '@angular/core/testing';
 import { programme } from '#shared/programme/programme';
 import { signIn, words } from '../../../test/sign-in';
 import { AnsweringForSpecs } from '../answering-for-specs';
+import { settledForSpecs } from '../settled-for-specs';
 import { NOW } from '../../core/now';
 import { Planner } from './planner';
 import { PlanningHereForSpecs } from './planning-here-for-specs';
@@ -38,10 +39,7 @@ async function opened(
   TestBed.configureTestingModule({ providers: [words, server.provider, starter, time, ...own] });
   signIn(['estimator']);
   TestBed.inject(ProgrammeStore).open(read.estimateId, 0);
-  for (let turn = 0; turn < 4; turn += 1) {
-    TestBed.tick();
-    await new Promise((resolve) => setTimeout(resolve));
-  }
+  await settledForSpecs();
 }
 
 /** Wanted on the day it begins, which is too soon. */

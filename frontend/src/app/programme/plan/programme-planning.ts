@@ -18,14 +18,8 @@ const replanSeconds = 4;
 const serverSeconds = 30;
 const pollEvery_ms = 1000;
 
-/** What came of a request. */
+/** What came of a request; the server is asked for the programme as it is, and says no request. */
 interface Planned {
-  readonly plan: Programme;
-  readonly request: ProgrammeRequest;
-}
-
-/** Why there is no plan, and of what; of what the server was asked, the programme as it is. */
-interface Failed {
   readonly plan: Programme;
   readonly request: ProgrammeRequest | undefined;
 }
@@ -39,7 +33,7 @@ export class ProgrammePlanning {
   private readonly notices = inject(Notices);
   private readonly costs = inject(RemedyCosts);
   private readonly ended = new AbortController();
-  private readonly failed = signal<Failed | undefined>(undefined);
+  private readonly failed = signal<Planned | undefined>(undefined);
   private readonly ways = signal<readonly CostedRemedy[] | undefined>(undefined);
   private readonly running = signal<SolutionAnswer | undefined>(undefined);
 

@@ -3,6 +3,7 @@ import { TestBed } from '@angular/core/testing';
 import type { WordCode } from '#shared/words/word-code';
 import { signIn, words } from '../../../test/sign-in';
 import { AnsweringForSpecs } from '../answering-for-specs';
+import { settledForSpecs } from '../settled-for-specs';
 import { PlanWords } from './plan-words';
 import { programmeForSpecs } from './programme-for-specs';
 import { ProgrammePlanning } from './programme-planning';
@@ -41,10 +42,7 @@ async function sentences(remedies: readonly CostedRemedy[]): Promise<readonly st
   TestBed.configureTestingModule({ providers: [words, server.provider, ...own] });
   signIn(['estimator']);
   TestBed.inject(ProgrammeStore).open(stands.estimateId, 0);
-  for (let turn = 0; turn < 4; turn += 1) {
-    TestBed.tick();
-    await new Promise((resolve) => setTimeout(resolve));
-  }
+  await settledForSpecs();
   return TestBed.inject(PlanWords).helps();
 }
 

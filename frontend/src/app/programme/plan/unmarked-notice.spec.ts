@@ -3,6 +3,7 @@ import type { ProgrammeAnswer } from '#shared/programme/programme-schema';
 import { signIn, words } from '../../../test/sign-in';
 import { NOW } from '../../core/now';
 import { AnsweringForSpecs, buttonIn, spoken } from '../answering-for-specs';
+import { settledForSpecs } from '../settled-for-specs';
 import { programmeForSpecs } from './programme-for-specs';
 import { ProgrammeStore } from './programme-store';
 import { UnmarkedNotice } from './unmarked-notice';
@@ -17,13 +18,7 @@ describe('UnmarkedNotice', () => {
   let fixture: ComponentFixture<UnmarkedNotice>;
   let server: AnsweringForSpecs;
   const element = () => fixture.nativeElement as HTMLElement;
-  const settle = async () => {
-    for (let turn = 0; turn < 4; turn += 1) {
-      await fixture.whenStable();
-      await new Promise((resolve) => setTimeout(resolve));
-      TestBed.tick();
-    }
-  };
+  const settle = () => settledForSpecs(fixture);
   async function open(change: Partial<ProgrammeAnswer>, now: string) {
     server = new AnsweringForSpecs({
       readProgramme: () => programmeForSpecs(change),

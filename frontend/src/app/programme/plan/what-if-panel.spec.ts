@@ -6,6 +6,7 @@ import type { WhatIf } from '#shared/programme/what-if';
 import { signIn, words } from '../../../test/sign-in';
 import { NOW } from '../../core/now';
 import { AnsweringForSpecs, buttonIn, spoken, type AskedParts } from '../answering-for-specs';
+import { settledForSpecs } from '../settled-for-specs';
 import { PLANNING_STARTER } from './planning-starter';
 import { PlanningHereForSpecs } from './planning-here-for-specs';
 import { programmeForSpecs } from './programme-for-specs';
@@ -19,13 +20,7 @@ describe('WhatIfPanel', () => {
   let fixture: ComponentFixture<WhatIfPanel>;
   let server: AnsweringForSpecs;
   const element = () => fixture.nativeElement as HTMLElement;
-  const settle = async () => {
-    for (let turn = 0; turn < 4; turn += 1) {
-      await fixture.whenStable();
-      await new Promise((resolve) => setTimeout(resolve));
-      TestBed.tick();
-    }
-  };
+  const settle = () => settledForSpecs(fixture);
 
   /** When what is asked is planned from. */
   let from_minutes = 0;
