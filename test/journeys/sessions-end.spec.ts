@@ -25,6 +25,8 @@ afterAll(() => walk.end());
 async function measuring(page: Page, { jobId, estimateId, memberId }: SampleEstimate): Promise<void> {
   await page.goto(`${walk.address}/jobs/${jobId}/estimates/${estimateId}/measure?member=${memberId}`);
   await page.getByLabel('How many').waitFor();
+  // A request still on its way would count as use, and the session would go on.
+  await page.waitForLoadState('networkidle');
 }
 
 async function contentOf({ estimateId }: SampleEstimate) {
