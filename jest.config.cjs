@@ -13,7 +13,7 @@ const swc = (parser) => [
 const node = (name) => ({
   displayName: name,
   rootDir: __dirname,
-  testEnvironment: 'node',
+  testEnvironment: '<rootDir>/test/environment/node-environment.cjs',
   testMatch: [`<rootDir>/${name}/**/*.spec.ts`],
   transform: {
     '^.+\\.ts$': swc({ syntax: 'typescript', decorators: true }),
@@ -40,6 +40,7 @@ module.exports = {
     {
       ...createCjsPreset({ tsconfig: '<rootDir>/frontend/tsconfig.spec.json' }),
       transformIgnorePatterns: ['node_modules/(?!(.*\\.mjs$|@angular/common/locales/.*\\.js$))'],
+      testEnvironment: 'jest-preset-angular/environments/jest-jsdom-env',
       displayName: 'frontend',
       rootDir: __dirname,
       testMatch: ['<rootDir>/frontend/src/**/*.spec.ts'],
