@@ -1,16 +1,23 @@
 import { askedAhead } from './app/client-page/asked-ahead';
+import { dateFormat } from './app/core/formats/date-format';
 import { oncePainted } from './app/core/once-painted';
 
 /** So long the application waits for what is read before it; on a line as slow as that it would rather be on its way. */
 const longest_ms = 3000;
+
+const inTime = (longest_ms: number) => new Promise<undefined>((resolve) => setTimeout(resolve, longest_ms));
 
 /**
  * The pages of clients, an application of its own: nothing of the workshop's travels with them. What the first page asks is asked, and its
  * head is shown, before the files of the application are fetched at all: so these do not stand in its way.
  */
 async function start(): Promise<void> {
-  const opened = askedAhead.begin(location).then(() => oncePainted(window));
-  await Promise.race([opened, new Promise((resolve) => setTimeout(resolve, longest_ms))]);
+  const opened = askedAhead.begin(location).then((page) => oncePainted(window).then(() => page));
+  // The first format of a page takes forty times as long as any later one. Here it takes the time in which the answer is on its way.
+  dateFormat(navigator.language, { weekday: 'long' });
+  const page = await Promise.race([opened, inTime(longest_ms)]);
+  // Where the visit led: its secret stays in no history, and the application begins at the paper itself.
+  if (page) history.replaceState(null, '', page);
   const files = document.querySelector<HTMLTemplateElement>('template[data-files]');
   if (files) document.head.append(files.content);
   const { startClient } = await import('./start-client');

@@ -22,7 +22,9 @@ function served(visit: Response = answer({ token: 'of the visit', papers, issue:
   const ask = (address: unknown, request: RequestInit = {}) => {
     requests.push([address as string, request]);
     if (request.method === 'POST') return Promise.resolve(visit);
-    return Promise.resolve(address === readSession.path ? answer({ token: 'of the session' }) : reading);
+    return Promise.resolve(
+      address === readSession.path ? answer({ token: 'of the session', signedIn: null }) : reading,
+    );
   };
   const ahead = new AskedAhead(ask, show);
   return { ahead, requests, show, asked: () => requests.map(([address, { method }]) => `${method} ${address}`) };
@@ -32,9 +34,9 @@ const ofIssue = addressOf(readClientIssue, { params: { issueId: paper.issue.id }
 const link = { pathname: '/client', hash: '#a-secret' };
 
 describe('AskedAhead', () => {
-  it('begins the visit of a link under the session, and has the first paper with it', async () => {
+  it('begins the visit of a link under the session, has the first paper with it, and says where that is read', async () => {
     const { ahead, requests, asked, show } = served();
-    await ahead.begin(link);
+    expect(await ahead.begin(link)).toBe(ofIssue.replace('/api', ''));
     expect(asked()).toEqual([called(readSession), called(beginClientVisit)]);
     const [, [, visit]] = requests;
     expect(visit.headers).toMatchObject({ 'x-csrf-token': 'of the session', 'content-type': 'application/json' });
@@ -46,10 +48,18 @@ describe('AskedAhead', () => {
 
   it('has the list with it where no one paper comes first', async () => {
     const { ahead, asked, show } = served(answer({ token: '', papers, issue: null }));
-    await ahead.begin(link);
+    expect(await ahead.begin(link)).toBe('/client/papers');
     expect(asked()).toEqual([called(readSession), called(beginClientVisit)]);
     expect(show.papers).toHaveBeenCalledWith(papers);
     await expect(ahead.answerTo('GET', readClientOverview.path)).resolves.toMatchObject({ ok: true, body: papers });
+  });
+
+  it('has the session of the visit with it, for whoever asks after that', async () => {
+    const { ahead } = served();
+    await ahead.begin(link);
+    await expect(ahead.answerTo('GET', readSession.path)).resolves.toMatchObject({
+      ...{ ok: true, url: readSession.path, body: { token: 'of the visit', signedIn: null } },
+    });
   });
 
   it('has the first paper before anybody hears of the visit', async () => {
@@ -61,7 +71,7 @@ describe('AskedAhead', () => {
 
   it('shows and asks nothing more where the link is closed, and hands the refusal on', async () => {
     const { ahead, asked, show } = served(answer({ title: 'Closed.' }, 410));
-    await ahead.begin(link);
+    expect(await ahead.begin(link)).toBeUndefined();
     expect(asked()).toEqual([called(readSession), called(beginClientVisit)]);
     expect(show.issue).not.toHaveBeenCalled();
     expect(await ahead.answerTo('POST', beginClientVisit.path)).toMatchObject({

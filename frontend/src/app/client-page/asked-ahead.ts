@@ -12,6 +12,7 @@ export interface Answer {
 }
 
 interface Visit {
+  readonly token: string;
   readonly papers: ClientOverview;
   readonly issue: ClientIssue | null;
 }
@@ -23,7 +24,10 @@ interface Show {
 
 const addressOfIssue = (issueId: string): string => `/api/client/issues/${issueId}`;
 const overview = '/api/client/overview';
+const session = '/api/session';
 const visits = '/api/client/visits';
+/** The page that shows what an address answers. */
+const pageOf = (address: string): string => (address === overview ? '/client/papers' : address.replace('/api', ''));
 
 async function answerOf(response: Response): Promise<Answer> {
   const { ok, status, url, headers } = response;
@@ -45,12 +49,15 @@ export class AskedAhead {
     },
   ) {}
 
-  /** Begins the visit whose secret an address holds, or asks for the paper it shows. Done when the head of that stands, or none will. */
-  async begin({ pathname, hash }: Pick<Location, 'pathname' | 'hash'>): Promise<void> {
-    const session = this.send('GET', '/api/session');
+  /**
+   * Begins the visit whose secret an address holds, or asks for the paper it shows. Done when the head of that stands, or none will; answers
+   * the page of the paper a visit leads to, so that the application can begin there.
+   */
+  async begin({ pathname, hash }: Pick<Location, 'pathname' | 'hash'>): Promise<string | undefined> {
+    const asked = this.send('GET', session);
     const secret = pathname === '/client' ? hash.slice(1) : '';
     // What cannot be shown ahead is shown, or complained of, by the application.
-    await (secret === '' ? this.read(pathname) : this.visit(session, secret)).catch(() => undefined);
+    return (secret === '' ? this.read(pathname) : this.visit(asked, secret)).catch(() => undefined);
   }
 
   /** The answer to a request that was asked already. */
@@ -60,33 +67,36 @@ export class AskedAhead {
     return answer;
   }
 
-  private async visit(session: Promise<Answer>, secret: string): Promise<void> {
-    const answer = await this.keep('POST', visits, this.opened(session, secret));
-    if (!answer.ok) return;
+  private async visit(asked: Promise<Answer>, secret: string): Promise<string | undefined> {
+    const answer = await this.keep('POST', visits, this.opened(asked, secret));
+    if (!answer.ok) return undefined;
     const { papers, issue } = answer.body as Visit;
     if (issue) this.show.issue(issue);
     else this.show.papers(papers);
+    return pageOf(issue ? addressOfIssue(issue.issue.id) : overview);
   }
 
   /** After the session, not beside it: a visit is begun under a new one, and the later answer would put the former back. */
-  private async opened(session: Promise<Answer>, secret: string): Promise<Answer> {
-    const { token } = (await session).body as { token: string };
+  private async opened(asked: Promise<Answer>, secret: string): Promise<Answer> {
+    const { token } = (await asked).body as { token: string };
     const headers = { 'content-type': 'application/json', 'x-csrf-token': token };
     const answer = await this.ask(visits, {
       ...{ method: 'POST', headers, body: JSON.stringify({ token: secret }) },
     }).then(answerOf);
-    if (answer.ok) this.keepFirst(answer);
+    if (answer.ok) this.keepFirst(answer, (await asked).body);
     return answer;
   }
 
-  /** The paper that is read first came with the visit: nobody has to ask for it. */
-  private keepFirst(answer: Answer): void {
-    const { papers, issue } = answer.body as Visit;
+  /** The paper that is read first came with the visit, and so did the session of it: nobody has to ask for them. */
+  private keepFirst(answer: Answer, before: unknown): void {
+    const { token, papers, issue } = answer.body as Visit;
     const [address, body] = issue ? [addressOfIssue(issue.issue.id), issue] : [overview, papers];
     void this.keep('GET', address, Promise.resolve({ ...answer, url: address, body }));
+    const own = { ...(before as object), token };
+    void this.keep('GET', session, Promise.resolve({ ...answer, url: session, body: own }));
   }
 
-  private async read(page: string): Promise<void> {
+  private async read(page: string): Promise<undefined> {
     if (page === '/client/papers') await this.shown(overview, this.show.papers);
     const [, issueId] = /^\/client\/issues\/([^/]+)$/.exec(page) ?? [];
     if (issueId) await this.shown(addressOfIssue(issueId), this.show.issue);
