@@ -38,7 +38,7 @@ async function buildPages() {
   await run(process.execPath, [ng, 'build', 'web', '--progress=false', '--stats-json']);
   await joinChunks(join(root, 'dist/web'));
   await run(process.execPath, [ng, 'build', 'client', '--progress=false', '--stats-json']);
-  prepareFirstVisit(join(root, 'dist/web/client-files'));
+  await prepareFirstVisit(join(root, 'dist/web/client-files'));
   await compressPages(join(root, 'dist/web'));
 }
 

@@ -1,28 +1,23 @@
-import { readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { readFileSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
+import { joined } from './join-chunks.mjs';
 
 /** What comes first: it asks for the paper and shows its head. */
-const first = ['frontend/src/client.ts'];
+const first = 'frontend/src/client.ts';
 
-/** What a first visit comes to in any case after that: the start, the words, and the application with its first two pages. */
+/** What a first visit comes to after that, in the order in which `start-client.ts` runs it. Each piece is a file, and a task of its own. */
 const later = [
   'frontend/src/start-client.ts',
   'shared/words/en.ts',
   'frontend/src/app/client-app.ts',
+  'shared/words/say.ts',
+  'frontend/src/app/core/formats/formats.ts',
+  'shared/measure/shape-schema.ts',
+  'shared/client-page/client-issues-endpoints.ts',
   'frontend/src/app/client-bootstrap.ts',
+  'frontend/src/app/client-page/later-parts.ts',
+  'frontend/src/app/client-page/further-parts.ts',
 ];
-
-/** The files that bring these sources, with all that they need before they can run. */
-function filesOf({ outputs }, sources) {
-  const files = new Set();
-  const add = (file) => {
-    if (files.has(file)) return;
-    files.add(file);
-    outputs[file].imports.filter(({ kind }) => kind === 'import-statement').forEach(({ path }) => add(path));
-  };
-  sources.forEach((source) => add(fileOf(outputs, source)));
-  return [...files];
-}
 
 function fileOf(outputs, source) {
   const found = Object.keys(outputs).find((file) => outputs[file].entryPoint === source);
@@ -30,25 +25,50 @@ function fileOf(outputs, source) {
   return found;
 }
 
+/** Which piece brings each built file: the first that needs it, since all before it are there already. */
+function piecesOf(outputs) {
+  const pieces = new Map();
+  for (const source of [first, ...later]) {
+    const add = (file) => {
+      if (pieces.has(file)) return;
+      pieces.set(file, source);
+      outputs[file].imports.filter(({ kind }) => kind === 'import-statement').forEach(({ path }) => add(path));
+    };
+    add(fileOf(outputs, source));
+  }
+  return pieces;
+}
+
 const linksTo = (files) => files.map((file) => `<link rel="modulepreload" href="/client-files/${file}">`).join('');
 
+/** Has the page bring its styles, and name the files of the application, so that `client.ts` has them fetched when their time has come. */
+function pageWith(folder, html, links) {
+  const stylesheet = /<link rel="stylesheet" href="\/client-files\/([\w.-]+)">/;
+  const styled = html.replace(stylesheet, (_, name) => {
+    const styles = readFileSync(join(folder, name), 'utf8');
+    return `<style nonce="CSP_NONCE">${styles}</style>`;
+  });
+  return styled.replace('</head>', `<template data-files>${links}</template></head>`);
+}
+
 /**
- * Has the page of clients bring its styles and ask for what comes first; the files of the application are named, so that `client.ts` has
- * all of them fetched at once when their time has come: one after the other they cost a phone seconds.
+ * Puts the files of the pages of clients together in the order in which a first visit runs them: one after the other they would cost a phone
+ * seconds, and cut as the builder cuts them they are three times as many.
  */
-export function prepareFirstVisit(folder) {
+export async function prepareFirstVisit(folder) {
   const [page, stats] = [join(folder, 'index.html'), join(folder, 'stats.json')];
-  const built = JSON.parse(readFileSync(stats, 'utf8'));
-  const atOnce = filesOf(built, first);
-  const afterwards = filesOf(built, later).filter((file) => !atOnce.includes(file));
-  const links = `${linksTo(atOnce)}<template data-files>${linksTo(afterwards)}</template>`;
-  const styled = readFileSync(page, 'utf8').replace(
-    /<link rel="stylesheet" href="\/client-files\/([\w.-]+)">/,
-    (_, name) => {
-      const styles = readFileSync(join(folder, name), 'utf8');
-      return `<style nonce="CSP_NONCE">${styles}</style>`;
-    },
-  );
-  writeFileSync(page, styled.replace('</head>', `${links}</head>`));
+  const { outputs } = JSON.parse(readFileSync(stats, 'utf8'));
+  const pieces = piecesOf(outputs);
+  const main = fileOf(outputs, first);
+  const output = await joined(folder, main, { manualChunks: (file) => pieces.get(file) });
+  readdirSync(folder)
+    .filter((name) => name.endsWith('.js'))
+    .forEach((name) => rmSync(join(folder, name)));
+  output.forEach(({ fileName, code }) => writeFileSync(join(folder, fileName), code));
+  const fileWith = (source) => output.find(({ moduleIds }) => moduleIds.includes(fileOf(outputs, source))).fileName;
+  const html = readFileSync(page, 'utf8')
+    .replace(/<link rel="modulepreload"[^>]*>/g, '')
+    .replace(main, fileWith(first));
+  writeFileSync(page, pageWith(folder, html, linksTo(later.map(fileWith))));
   rmSync(stats);
 }

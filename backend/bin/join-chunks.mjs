@@ -23,7 +23,7 @@ export async function joinChunks(folder) {
 }
 
 /** The files put together anew from the one they begin with; what is no part of them (workers) stays beside them as it was. */
-async function joined(folder, main) {
+export async function joined(folder, main, options = {}) {
   const texts = new Map(
     readdirSync(folder)
       .filter((name) => name.endsWith('.js'))
@@ -32,7 +32,7 @@ async function joined(folder, main) {
   const bundle = await rollup({ input: main, treeshake: false, plugins: [builtFiles(texts)] });
   const { output } = await bundle.generate({
     ...{ format: 'es', compact: true, hashCharacters: 'base36' },
-    ...{ entryFileNames: 'main-[hash].js', chunkFileNames: 'chunk-[hash].js' },
+    ...{ entryFileNames: 'main-[hash].js', chunkFileNames: 'chunk-[hash].js', ...options },
   });
   await bundle.close();
   return output;

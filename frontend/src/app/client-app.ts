@@ -1,17 +1,25 @@
-import { ChangeDetectionStrategy, Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component, inject } from '@angular/core';
 import { RouterOutlet } from '@angular/router';
+import { Notices } from './core/problems/notices';
 import { NoticeList } from './ui/notice/notice-list';
 
-/** The application of clients; what is said in passing has its place once the first page stands, for it brings buttons along. */
+/**
+ * The application of clients. What is said in passing has its place from the start, so that it is read aloud, but comes with the first of it, for it
+ * brings buttons along; fetched before that, since the line may be what it complains of.
+ */
 @Component({
   selector: 'app-root',
   imports: [NoticeList, RouterOutlet],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <router-outlet />
-    @defer (on idle) {
-      <app-notice-list />
-    }
+    <div aria-live="polite">
+      @defer (when notices.current().length > 0; prefetch on timer(6s)) {
+        <app-notice-list />
+      }
+    </div>
   `,
 })
-export class ClientApp {}
+export class ClientApp {
+  protected readonly notices = inject(Notices);
+}

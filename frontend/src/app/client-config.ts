@@ -6,7 +6,13 @@ import {
   provideAppInitializer,
   provideBrowserGlobalErrorListeners,
 } from '@angular/core';
-import { TitleStrategy, provideRouter, withComponentInputBinding, withInMemoryScrolling } from '@angular/router';
+import {
+  TitleStrategy,
+  provideRouter,
+  withComponentInputBinding,
+  withDisabledInitialNavigation,
+  withInMemoryScrolling,
+} from '@angular/router';
 import type { Catalogue } from '#shared/words/word-code';
 import { clientPageRoutes } from './client-page/client-page-routes';
 import { ClientSession, answeredAhead } from './client-page';
@@ -23,6 +29,7 @@ export const clientConfig = (catalogue: Catalogue): ApplicationConfig => ({
     provideRouter(
       [{ path: 'client', children: clientPageRoutes }],
       withComponentInputBinding(),
+      withDisabledInitialNavigation(),
       withInMemoryScrolling({ scrollPositionRestoration: 'enabled' }),
     ),
     provideHttpClient(withFetch(), withInterceptors([answeredAhead])),
