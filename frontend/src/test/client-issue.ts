@@ -132,7 +132,9 @@ export class ClientVisit {
     const visit = new ClientVisit(fixture, TestBed.inject(HttpTestingController));
     await visit.settle();
     visit.http.expectOne(`/api/client/issues/${issue.issue.id}`).flush(issue);
-    await visit.settle();
+    await visit.until('app-client-issue-rest');
+    // What stands further down comes once somebody reads on.
+    window.dispatchEvent(new Event('scroll'));
     await visit.until('app-client-thread');
     return visit;
   }

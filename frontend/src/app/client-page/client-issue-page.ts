@@ -13,7 +13,6 @@ import {
   signal,
   viewChild,
 } from '@angular/core';
-import { MatButton } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
 import { readClientPaper } from '#shared/client-page/client-issues-endpoints';
 import { addressOf } from '../core/api/address-of';
@@ -25,7 +24,8 @@ import { Skeleton } from '../ui/page/skeleton';
 import { ClientFrame } from './client-frame';
 import { ClientIssueStore } from './client-issue-store';
 import { ClientRefused } from './client-refused';
-import { ClientDecline, ClientIssueRest, ClientReview } from './later-parts';
+import { ClientDecline, ClientReview } from './further-parts';
+import { ClientIssueRest } from './later-parts';
 
 /** An estimate as its client reads it: the piece, the choices, the price, the terms, questions, and the answer. */
 @Component({
@@ -36,7 +36,6 @@ import { ClientDecline, ClientIssueRest, ClientReview } from './later-parts';
     ClientIssueRest,
     ClientRefused,
     ClientReview,
-    MatButton,
     NgTemplateOutlet,
     RouterLink,
     Skeleton,

@@ -1,54 +1,60 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
-import { MatButton } from '@angular/material/button';
 import type { ClientIssue } from '#shared/client-page/client-issue-schema';
-import { Formats } from '../core/formats/formats';
-import { Words } from '../core/formats/words';
-import { FindingList } from '../ui/page/finding-list';
 import { Skeleton } from '../ui/page/skeleton';
-import { ClientChoices } from './client-choices';
-import { ClientIssueStore } from './client-issue-store';
-import { ClientLines } from './client-lines';
-import { ClientPayments } from './client-payments';
+import { ClientIssueStore, partsOfIssue } from './client-issue-store';
 import { ClientPieces } from './client-pieces';
-import { ClientThread } from './client-thread';
+import { ClientIssueParts } from './further-parts';
 import { inTurn } from './in-turn';
 
-/** All of an estimate below its head, part after part: the piece, the choices, the price, the terms, questions, and the answer. */
+/** All of an estimate below its head: the pieces at once, what stands further down when its reader goes there. */
 @Component({
   selector: 'app-client-issue-rest',
-  imports: [ClientChoices, ClientLines, ClientPayments, ClientPieces, ClientThread, FindingList, MatButton, Skeleton],
+  imports: [ClientIssueParts, ClientPieces, Skeleton],
   changeDetection: ChangeDetectionStrategy.OnPush,
-  templateUrl: './client-issue-rest.html',
-  styleUrl: './client-issue-rest.scss',
+  template: `
+    @if (issue().pieces.length > 0) {
+      <section>
+        <h2 i18n>The piece</h2>
+        <app-client-pieces [issue]="issue()" />
+      </section>
+    }
+    @defer (when store.shown() > 2) {
+      <app-client-issue-parts class="rest" [class.whole]="isWhole()" [issue]="issue()" (declining)="declining.emit()" />
+    } @placeholder {
+      <app-skeleton class="rest" [lines]="8" />
+    } @error {
+      <p class="rest" role="alert" i18n>The rest of it could not be fetched. Please open this page again.</p>
+    }
+  `,
+  styles: `
+    :host {
+      display: grid;
+      gap: 40px;
+      align-content: start;
+    }
+
+    section {
+      display: grid;
+      gap: 12px;
+      min-width: 0;
+    }
+
+    // Higher than a screen, so that nothing in view is moved by what comes.
+    .rest:not(.whole) {
+      align-content: start;
+      min-height: 200vh;
+    }
+  `,
 })
 export class ClientIssueRest {
   protected readonly store = inject(ClientIssueStore);
-  protected readonly formats = inject(Formats);
-  protected readonly words = inject(Words);
+
+  protected readonly isWhole = computed(() => this.store.shown() >= partsOfIssue);
 
   readonly issue = input.required<ClientIssue>();
   readonly declining = output();
 
-  protected readonly parts = 6;
-  protected readonly shown = this.store.shown;
-  protected readonly care = computed(() =>
-    (this.store.price()?.care ?? []).map((code) => this.words.say(code as 'care-handling')),
-  );
-  /** What a variation takes away, in words. */
-  protected readonly takenAway = computed(() => {
-    const { gross_minor } = this.store.price() ?? { gross_minor: 0 };
-    return gross_minor < 0 ? this.words.say('paper-takes-away', { amount: this.formats.money(-gross_minor) }) : '';
-  });
-  protected readonly dates = computed(() => {
-    const programme = this.store.programme();
-    if (!programme) return '';
-    const [starts, finishes, offered] = [programme.startsOn, programme.finishesOn, programme.offeredOn].map((day) =>
-      this.formats.day(day),
-    );
-    return this.words.say('paper-programme-dates', { starts, finishes, offered, days: programme.workingDays });
-  });
-
   constructor() {
-    inTurn(this.parts, this.store.shown);
+    inTurn(partsOfIssue, this.store.shown);
   }
 }

@@ -4,6 +4,9 @@ import type { ClientDecision, ClientIssue } from '#shared/client-page/client-iss
 import type { Question } from '#shared/agreements/question-schema';
 import { Api } from '../core/api/api';
 
+/** How many parts of an issue come one after the other below its head: of its pieces one member and those after it, the choices, and so on. */
+export const partsOfIssue = 7;
+
 /** An issue a client reads, what they chose of it, and what that comes to. */
 @Injectable()
 export class ClientIssueStore {

@@ -19,7 +19,10 @@ describe('The piece on a client’s page', () => {
   it('is drawn to scale member by member, with what each is made of', async () => {
     const visit = await ClientVisit.begin();
     expect(visit.element.querySelectorAll('app-client-pieces svg').length).toBeGreaterThanOrEqual(2);
-    expect(visit.text).toContain('lime, Egg and dart, burnished gold');
+    const [made, finish] = [...visit.element.querySelectorAll('app-client-pieces article .muted')]
+      .filter(({ tagName }) => tagName === 'P')
+      .map(({ textContent }) => textContent);
+    expect([made, finish]).toEqual(['lime, Egg and dart', 'burnished gold']);
   });
 
   it('shows the first three members, and the others once they are asked for', async () => {

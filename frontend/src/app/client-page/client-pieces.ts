@@ -6,7 +6,7 @@ import { ClientIssueStore } from './client-issue-store';
 
 type Member = ClientIssue['pieces'][number]['members'][number];
 
-/** So many members are drawn at once; the others are one press away. */
+/** So many members are drawn by themselves, the first before the others; what is more is one press away. */
 const first = 3;
 
 /** The piece member by member, drawn to scale: those of the base, and of what was chosen in its place. */
@@ -30,14 +30,19 @@ const first = 3;
               }
             </p>
             <p class="muted">{{ about(member) }}</p>
+            @for (finish of member.finishes; track finish) {
+              <p class="muted">{{ finish }}</p>
+            }
           </article>
         }
       </section>
     }
     @if (hidden() > 0) {
-      <button matButton="outlined" type="button" (click)="isWhole.set(true)" i18n>
-        Show {hidden(), plural, =1 {one more member} other {{{ hidden() }} more members}}
-      </button>
+      @defer (when store.shown() > 1) {
+        <button matButton="outlined" type="button" (click)="isWhole.set(true)" i18n>
+          Show {hidden(), plural, =1 {one more member} other {{{ hidden() }} more members}}
+        </button>
+      }
     }
   `,
   styles: `
@@ -68,7 +73,7 @@ const first = 3;
   `,
 })
 export class ClientPieces {
-  private readonly store = inject(ClientIssueStore);
+  protected readonly store = inject(ClientIssueStore);
 
   readonly issue = input.required<ClientIssue>();
   protected readonly isWhole = signal(false);
@@ -76,11 +81,13 @@ export class ClientPieces {
   private readonly all = computed(() =>
     this.issue().pieces.map((piece) => ({ ...piece, members: piece.members.filter((member) => this.isMade(member)) })),
   );
-  protected readonly pieces = computed(() => (this.isWhole() ? this.all() : beginningOf(this.all())));
+  protected readonly pieces = computed(() =>
+    this.isWhole() ? this.all() : beginningOf(this.all(), this.store.shown() > 1 ? first : 1),
+  );
   protected readonly hidden = computed(() => countOf(this.all()) - countOf(this.pieces()));
 
-  protected about({ timber, ornaments, finishes }: Member): string {
-    return [timber, ...ornaments, ...finishes].filter((text) => text !== '').join(', ');
+  protected about({ timber, ornaments }: Member): string {
+    return [timber, ...ornaments].filter((text) => text !== '').join(', ');
   }
 
   private isMade({ id, alternativeId }: Member): boolean {
@@ -96,8 +103,8 @@ type Piece = ClientIssue['pieces'][number];
 
 const countOf = (pieces: readonly Piece[]): number => pieces.reduce((sum, { members }) => sum + members.length, 0);
 
-function beginningOf(pieces: readonly Piece[]): Piece[] {
-  let left = first;
+function beginningOf(pieces: readonly Piece[], count: number): Piece[] {
+  let left = count;
   return pieces.flatMap((piece) => {
     const members = piece.members.slice(0, Math.max(0, left));
     left -= members.length;

@@ -1,4 +1,2 @@
-/** All of an estimate below its head, in one piece: it comes once the head stands, so that a phone waits for neither drawings nor forms. */
-export { ClientDecline } from './client-decline';
+/** The pieces of an estimate, which come once its head stands, so that a phone does not wait for drawings. */
 export { ClientIssueRest } from './client-issue-rest';
-export { ClientReview } from './client-review';
