@@ -15,8 +15,8 @@ const later = [
   'shared/measure/shape-schema.ts',
   'shared/client-page/client-issues-endpoints.ts',
   'frontend/src/app/client-bootstrap.ts',
+  'frontend/src/app/client-page/client-issue-rest.ts',
   'frontend/src/app/client-page/later-parts.ts',
-  'frontend/src/app/client-page/further-parts.ts',
 ];
 
 function fileOf(outputs, source) {

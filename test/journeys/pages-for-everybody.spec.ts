@@ -36,6 +36,12 @@ async function wrongOn(page: Page, see: (screen: string) => Promise<void>): Prom
   return found;
 }
 
+/** A client's page shows what stands further down to whoever reads on. */
+async function readOn(page: Page): Promise<void> {
+  await page.keyboard.press('Shift');
+  await page.locator('app-skeleton').first().waitFor({ state: 'detached' });
+}
+
 async function wrongOf(paths: readonly string[], { page, see }: Person): Promise<Record<string, string[]>> {
   const found: Record<string, string[]> = {};
   for (const path of paths) {
@@ -43,6 +49,7 @@ async function wrongOf(paths: readonly string[], { page, see }: Person): Promise
     await page.goto('about:blank');
     await page.goto(walk.address + path);
     await page.getByRole('heading').first().waitFor();
+    if (/^\/client[/#]/.test(path)) await readOn(page);
     await page.waitForTimeout(300);
     const wrong = await wrongOn(page, (screen) => see(`${pictureOf(path)} ${screen}`));
     if (wrong.length > 0) found[path] = wrong;

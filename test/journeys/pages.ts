@@ -14,7 +14,7 @@ export const sourceFiles = (...endings: string[]): { readonly path: string; read
 /** Every page the addresses of the application lead to, by the name of its component. */
 export const pagesOfTheApplication = (): string[] =>
   sourceFiles('-routes.ts').flatMap(({ text }) =>
-    [...text.matchAll(/(?:loadComponent: \(\) => \w+\([^)]*\)\s*\.then\(\(\{|\bcomponent:) (\w+)/g)].map(
+    [...text.matchAll(/(?:loadComponent: \(\) => \w+\([^)]*\)\s*\.then\(\((?:\{|\) =>)|\bcomponent:) (\w+)/g)].map(
       ([, name]) => name ?? '',
     ),
   );

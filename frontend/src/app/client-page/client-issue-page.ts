@@ -22,10 +22,10 @@ import { PageTitle } from '../core/routing/page-title';
 import { Session } from '../core/session/session';
 import { Skeleton } from '../ui/page/skeleton';
 import { ClientFrame } from './client-frame';
+import { ClientIssueRest } from './client-issue-rest';
 import { ClientIssueStore } from './client-issue-store';
 import { ClientRefused } from './client-refused';
-import { ClientDecline, ClientReview } from './further-parts';
-import { ClientIssueRest } from './later-parts';
+import { ClientDecline, ClientReview } from './later-parts';
 
 /** An estimate as its client reads it: the piece, the choices, the price, the terms, questions, and the answer. */
 @Component({

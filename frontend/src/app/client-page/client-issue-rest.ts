@@ -3,8 +3,8 @@ import type { ClientIssue } from '#shared/client-page/client-issue-schema';
 import { Skeleton } from '../ui/page/skeleton';
 import { ClientIssueStore, partsOfIssue } from './client-issue-store';
 import { ClientPieces } from './client-pieces';
-import { ClientIssueParts } from './further-parts';
 import { inTurn } from './in-turn';
+import { ClientIssueParts } from './later-parts';
 
 /** All of an estimate below its head: the pieces at once, what stands further down when its reader goes there. */
 @Component({

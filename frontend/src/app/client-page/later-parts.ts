@@ -1,2 +1,4 @@
-/** The pieces of an estimate, which come once its head stands, so that a phone does not wait for drawings. */
-export { ClientIssueRest } from './client-issue-rest';
+/** What stands further down in an estimate and what it leads to, in one piece: choices, forms and buttons. */
+export { ClientDecline } from './client-decline';
+export { ClientIssueParts } from './client-issue-parts';
+export { ClientReview } from './client-review';
