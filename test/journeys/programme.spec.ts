@@ -49,6 +49,17 @@ it('plans a job of three build-ups, is told what breaks a window, and keeps noth
   await see('journey programme');
   expect(await violations(page)).toEqual([]);
 
+  // The keyboard comes from the drawing straight to a task, and hears its story; the arrows lead on.
+  await page.locator('app-dated-ribbon .scroll').focus();
+  await page.keyboard.press('Tab');
+  const task = page.locator('app-dated-ribbon [data-task]:focus');
+  const [first, story] = [await task.getAttribute('data-task'), page.locator('app-dated-ribbon .story')];
+  await story.waitFor();
+  await see('journey programme by the keyboard');
+  await page.keyboard.press('ArrowRight');
+  await expect(task.getAttribute('data-task')).resolves.not.toBe(first);
+  await story.waitFor();
+
   // Burnishing waits for the leaf and not for long: some days later its window has closed.
   await page.getByRole('button', { name: 'All of it' }).click();
   const burnish = page.getByRole('button', { name: /^Burnish/ }).first();
