@@ -33,6 +33,14 @@ export const asItIs: WhatIf = { day: null, climate: null, furtherGradeIds: [], l
 const seconds = 6;
 const replanSeconds = 2;
 
+const week_minutes = 7 * 24 * 60;
+
+/** The same plan so many whole weeks later that it begins no sooner than it may; the days it works on stay those of the week. */
+function noSoonerThan(plan: Programme, start_minutes: number): Programme {
+  const weeks = Math.ceil((start_minutes - plan.start_minutes) / week_minutes);
+  return shiftedPlan(plan, Math.max(0, weeks) * week_minutes);
+}
+
 /** How minutes of an answer are read. */
 export const frameOfWhatIf = ({ firstDay, startsAt, timeZone }: WhatIfAnswer): ProgrammeFrame => ({
   ...{ firstDay, timeZone },
@@ -69,7 +77,7 @@ export class WhatIfComparison {
   private readonly done = signal<readonly ComparedWay[]>([]);
   private readonly underWay = signal<string | undefined>(undefined);
   private isStopped = false;
-  /** The plan of the first way: where it keeps the rules of another too, that one never ends later. */
+  /** The plan of the first way, from which the others go on. */
   private first: FramedPlan | undefined;
 
   readonly ways = this.done.asReadonly();
@@ -110,14 +118,17 @@ export class WhatIfComparison {
     return compared(way.name, answer, plan);
   }
 
-  /** The plan of the first way; for the first way itself what is kept, with only that moved which can no longer stand from now on. */
+  /**
+   * The plan of the first way, from the day this one begins, or for the first way itself what is kept; with only that moved which can no longer
+   * stand. So every way goes on from the same plan, and none looks worse for the time it took to find that one.
+   */
   private async known(answer: WhatIfAnswer): Promise<Programme | undefined> {
     const known = this.first ?? this.kept();
     if (!known) return undefined;
-    const plan = shiftedPlan(known.plan, minutesBetween(known.frame, frameOfWhatIf(answer)));
-    if (this.first) return plan;
-    const search = { previous: plan };
-    const moved = await this.planner.plan({ request: answer.request, search, seconds: replanSeconds });
+    const told = shiftedPlan(known.plan, minutesBetween(known.frame, frameOfWhatIf(answer)));
+    const previous = this.first ? noSoonerThan(told, answer.request.start_minutes) : told;
+    const question = { request: answer.request, search: { previous }, seconds: replanSeconds };
+    const moved = await this.planner.plan(question);
     if (this.isStopped) throw new PlanningStopped();
     return moved;
   }

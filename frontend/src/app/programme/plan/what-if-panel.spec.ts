@@ -24,13 +24,15 @@ describe('WhatIfPanel', () => {
 
   /** When what is asked is planned from. */
   let from_minutes = 0;
+  let fromOfDay_minutes = 0;
   beforeEach(() => {
     from_minutes = 0;
+    fromOfDay_minutes = 0;
   });
 
   /** Another way costs 120 more, and whoever is there besides is really there. */
   function whatIf({ body }: AskedParts): unknown {
-    const { furtherGradeIds, climate } = body as WhatIf;
+    const { day, furtherGradeIds, climate } = body as WhatIf;
     const further = furtherGradeIds.map((gradeId, at) => personForSpecs(`further ${at}`, gradeId));
     const isOther = furtherGradeIds.length > 0 || climate !== null;
     const { request, items, firstDay, startsAt, timeZone } = answer;
@@ -47,7 +49,12 @@ describe('WhatIfPanel', () => {
         digits: 2,
         overtime_percent: 50,
       },
-      request: { ...request, start_minutes: from_minutes, lags, people: [...request.people, ...further] },
+      request: {
+        ...request,
+        start_minutes: day ? fromOfDay_minutes : from_minutes,
+        lags,
+        people: [...request.people, ...further],
+      },
       ...{ cost_minor: isOther ? 112_000 : 100_000, costDifference_minor: isOther ? 12_000 : 0 },
       ...{ gross_minor: 150_000, grossDifference_minor: 0 },
     };
@@ -105,6 +112,23 @@ describe('WhatIfPanel', () => {
     expect(cold[2]).toBe('€1,120.00');
     expect(cold[3]).toMatch(/^\+\s?€120\.00$/);
     expect(cold[1]).toMatch(/days? later$/);
+  });
+
+  it('goes on from the plan as it is where the start is later, whole weeks later', async () => {
+    await open();
+    tick(1, false);
+    tick(0, true);
+    await settle();
+    const asked = jest.spyOn(PlanningHereForSpecs.prototype, 'postMessage');
+    fromOfDay_minutes = 8 * 1440;
+    buttonIn(element(), 'Compare').click();
+    await settle();
+    const [, , previous, last] = asked.mock.calls.map(([{ search }]) => search);
+    const own = programme(answer.request);
+    expect(previous.previous?.start_minutes).toBe(own.start_minutes + 14 * 1440);
+    expect(last.incumbent?.start_minutes).toBeGreaterThanOrEqual(8 * 1440);
+    expect(last.incumbent?.finish_minutes).toBeLessThanOrEqual((own.finish_minutes ?? 0) + 14 * 1440);
+    asked.mockRestore();
   });
 
   it('moves the day it is wanted by where it is planned backward, and calls it so', async () => {
