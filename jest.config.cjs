@@ -10,6 +10,9 @@ const swc = (parser) => [
   },
 ];
 
+/** Packages that come as modules of the language alone. */
+const modules = '(@asamuzakjp|@csstools|@exodus|entities|icosphere|parse5|pdfjs-dist)/';
+
 const node = (name) => ({
   displayName: name,
   rootDir: __dirname,
@@ -17,9 +20,9 @@ const node = (name) => ({
   testMatch: [`<rootDir>/${name}/**/*.spec.ts`],
   transform: {
     '^.+\\.ts$': swc({ syntax: 'typescript', decorators: true }),
-    'node_modules/(icosphere|pdfjs-dist)/.+\\.m?js$': swc({ syntax: 'ecmascript' }),
+    [`node_modules/${modules}.+\\.m?js$`]: swc({ syntax: 'ecmascript' }),
   },
-  transformIgnorePatterns: ['node_modules/(?!(icosphere|pdfjs-dist)/)'],
+  transformIgnorePatterns: [`node_modules/(?!${modules})`],
 });
 
 /** Threads start from what `build-programs.mjs` put together: read from the sources each start would take seconds. */
