@@ -127,8 +127,8 @@ export class WhatIfComparison {
     if (!known) return undefined;
     const told = shiftedPlan(known.plan, minutesBetween(known.frame, frameOfWhatIf(answer)));
     const previous = this.first ? noSoonerThan(told, answer.request.start_minutes) : told;
-    const question = { request: answer.request, search: { previous }, seconds: replanSeconds };
-    const moved = await this.planner.plan(question);
+    const search = { previous, incumbent: previous };
+    const moved = await this.planner.plan({ request: answer.request, search, seconds: replanSeconds });
     if (this.isStopped) throw new PlanningStopped();
     return moved;
   }
