@@ -28,7 +28,10 @@ const node = (name) => ({
 /** Threads start from what `build-programs.mjs` put together: read from the sources each start would take seconds. */
 const onDatabase = (name) => ({
   ...node(name),
-  moduleNameMapper: { '/threads/thread-file$': '<rootDir>/test/programs/thread-file.ts' },
+  moduleNameMapper: {
+    '/threads/thread-file$': '<rootDir>/test/programs/thread-file.ts',
+    '^@node-rs/argon2$': '<rootDir>/test/programs/argon2.ts',
+  },
   globalSetup: '<rootDir>/test/database/jest-set-up.mjs',
   globalTeardown: '<rootDir>/test/database/jest-tear-down.mjs',
 });

@@ -59,7 +59,12 @@ async function jest(name, args, limit_minutes) {
   say(name);
   const report = join(root, '.cache', `${name.replaceAll(' ', '-')}.json`);
   rmSync(report, { force: true });
-  const reporting = ['--json', `--outputFile=${report}`, `--testTimeout=${testLimit_milliseconds}`];
+  const reporting = [
+    '--config=test/together.cjs',
+    '--json',
+    `--outputFile=${report}`,
+    `--testTimeout=${testLimit_milliseconds}`,
+  ];
   const code = await run([process.execPath, 'node_modules/jest/bin/jest.js', ...reporting, ...args], limit_minutes);
   return countsOf(report, code);
 }

@@ -6,7 +6,7 @@ import type { Browser, BrowserContext, Page } from 'playwright-core';
 import { noteCookie } from '../api/faults-of-log';
 import { startApi, type Api } from '../api/start-api';
 import { password } from '../api/test-workshop';
-import { openBrowser } from './open-browser';
+import { openBrowser, unhurried } from './open-browser';
 import { desk, type Screen } from './screens';
 
 const root = join(__dirname, '../..');
@@ -41,7 +41,7 @@ export class Walk {
     const { port } = server.address() as AddressInfo;
     const api = await startApi({ WEB_DIR: join(root, 'dist/web'), PORT: String(port) });
     server.on('request', api.app.web.express);
-    const browser = await openBrowser();
+    const browser = await openBrowser(unhurried);
     if (pictures) mkdirSync(pictures, { recursive: true });
     return new Walk(api, server, browser);
   }
