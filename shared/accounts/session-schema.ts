@@ -14,7 +14,10 @@ export const signedInSchema = z.strictObject({
   memberships: z.array(membershipSchema),
   membership: membershipSchema.optional(),
   workshop: workshopSchema
-    .pick({ id: true, name: true, locale: true, currency: true, lengthUnit: true, timeZone: true, paperSize: true })
+    .pick({
+      ...{ id: true, name: true, locale: true, currency: true, lengthUnit: true, timeZone: true, paperSize: true },
+      defaultTaxCategory: true,
+    })
     .optional(),
 });
 

@@ -29,13 +29,16 @@ const title = `Base && touch ${mark} | cat`;
 const reference = `\`touch ${absolute}\``;
 
 let api: Api;
-const started = (['spawn', 'spawnSync', 'exec', 'execSync', 'execFile', 'execFileSync', 'fork'] as const).map((name) =>
-  jest.spyOn(childProcess, name),
-);
+const ways = ['spawn', 'spawnSync', 'exec', 'execSync', 'execFile', 'execFileSync', 'fork'] as const;
+let started: jest.SpyInstance[];
 beforeAll(async () => {
+  started = ways.map((name) => jest.spyOn(childProcess, name));
   api = await startApi();
 }, 60_000);
-afterAll(() => api.stop());
+afterAll(async () => {
+  for (const spy of started) spy.mockRestore();
+  await api.stop();
+});
 
 const commands = () => started.reduce((sum, spy) => sum + spy.mock.calls.length, 0);
 

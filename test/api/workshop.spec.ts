@@ -1,8 +1,11 @@
 import { readdir } from 'node:fs/promises';
 import { join } from 'node:path';
 import sharp from 'sharp';
+import { readSession } from '#shared/accounts/session-endpoints';
+import type { SessionAnswer } from '#shared/accounts/session-schema';
 import { changeWorkshop, putLogo, readLogo, readWorkshop, removeLogo } from '#shared/accounts/workshop-endpoints';
 import { startApi, type Api } from './start-api';
+import { sampleEstimate } from './sample-estimate';
 import { foundingSettings } from './test-workshop';
 
 /** The settings of a workshop, and pictures from outside (ASVS 5.2.1, 5.2.2, 5.3.1, 5.3.2, 1.3.4). */
@@ -25,6 +28,37 @@ const settings = {
 };
 const change = async (changed: object) =>
   owner().call(changeWorkshop, { version: await version(), body: { ...settings, ...changed } });
+
+/** The code of the tax a new estimate begins with. */
+async function taxOfNewEstimate(workshopId: string, estimateId: string): Promise<string | undefined> {
+  const { settings, rateCardId } = (await api.app.estimates.drafts.whole(workshopId, estimateId)).estimate;
+  const { money } = await api.app.rateCards.service.card(workshopId, rateCardId);
+  return money.taxCategories.find(({ id }) => id === settings.taxCategoryId)?.code;
+}
+
+test('the usual tax category is what new estimates begin with, and a page is told of it', async () => {
+  const taxOf = async () => taxOfNewEstimate(api.ours.id, (await sampleEstimate(api.ours)).estimateId);
+  const told = async () => (await owner().call(readSession)).body as SessionAnswer;
+  expect([await taxOf(), (await told()).signedIn?.workshop?.defaultTaxCategory]).toEqual(['S', 'S']);
+  expect((await change({ defaultTaxCategory: 'O' })).status).toBe(200);
+  expect([await taxOf(), (await told()).signedIn?.workshop?.defaultTaxCategory]).toEqual(['O', 'O']);
+  expect((await change({})).status).toBe(200);
+});
+
+test('a workshop where no value added tax is levied begins outside its scope', async () => {
+  const { accountId, name } = api.ours.people.owner.actor;
+  const habits = {
+    ...foundingSettings,
+    name: 'Weir Carvers',
+    country: 'US',
+    currency: 'USD',
+    lengthUnit: 'in',
+  } as const;
+  const id = await api.platform.database.transaction(() =>
+    api.app.accounts.workshops.found({ accountId, name }, habits),
+  );
+  expect((await api.app.accounts.workshops.get(id)).defaultTaxCategory).toBe('O');
+});
 
 test.each([
   ['a currency that is none', { currency: 'XXY' }, 'currency'],

@@ -57,7 +57,7 @@ it('plans a job of three build-ups, is told what breaks a window, and keeps noth
   await story.waitFor();
   await see('journey programme by the keyboard');
   await page.keyboard.press('ArrowRight');
-  await expect(task.getAttribute('data-task')).resolves.not.toBe(first);
+  await page.locator(`app-dated-ribbon [data-task]:focus:not([data-task="${first}"])`).waitFor();
   await story.waitFor();
 
   // Burnishing waits for the leaf and not for long: some days later its window has closed.

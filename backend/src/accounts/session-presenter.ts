@@ -15,8 +15,8 @@ export interface SessionFacts {
 const presentMembership = ({ id, workshopName, roles }: OwnMembershipRow) => ({ id, workshopName, roles: [...roles] });
 
 function presentWorkshopFacts(workshop: WorkshopSettingsRow) {
-  const { id, name, locale, currency, lengthUnit, timeZone, paperSize } = workshop;
-  return { id, name, locale, currency, lengthUnit, timeZone, paperSize };
+  const { id, name, locale, currency, lengthUnit, timeZone, paperSize, defaultTaxCategory } = workshop;
+  return { id, name, locale, currency, lengthUnit, timeZone, paperSize, defaultTaxCategory };
 }
 
 function presentSignedIn({ account, memberships, membershipId, workshop }: SessionFacts): SignedInAnswer {

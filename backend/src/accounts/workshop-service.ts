@@ -1,4 +1,5 @@
 import { v7 as newId } from 'uuid';
+import { usualTaxCategory } from '#shared/accounts/usual-tax-category';
 import type { NewWorkshop, WorkshopSettings } from '#shared/accounts/workshop-schema';
 import type { Actor } from '#shared/actor/actor';
 import type { Role } from '#shared/actor/role';
@@ -32,7 +33,6 @@ const emptySettings = {
   telephone: '',
   email: '',
   taxRegistration: '',
-  defaultTaxCategory: 'S',
 } as const;
 const letterhead = { longest_pixels: 1_200, as: 'png' } as const;
 
@@ -62,7 +62,9 @@ export class WorkshopService {
   async found(owner: { accountId: string; name: string }, workshop: NewWorkshop): Promise<string> {
     const workshopId = newId();
     const start = { ...emptySettings, addressLines: [...emptySettings.addressLines], logoFileId: null, version: 1 };
-    await this.parts.workshops.insert({ ...workshop, ...start, id: workshopId, createdAt: this.parts.clock.now() });
+    const createdAt = this.parts.clock.now();
+    const defaultTaxCategory = usualTaxCategory(workshop.country);
+    await this.parts.workshops.insert({ ...workshop, ...start, defaultTaxCategory, id: workshopId, createdAt });
     await this.join(workshopId, { ...owner, roles: ['owner'] });
     await this.record({ workshopId, ...owner }, 'history-workshop-founded', { after: workshop });
     for (const work of this.whenFounded) await work({ workshopId, ...owner });

@@ -70,10 +70,16 @@ export class EstimateService {
     const known = await this.parts.estimates.find(workshopId, at.id);
     if (known) return this.same(known, at.jobId, kind);
     const card = await this.parts.cards.inForce(workshopId);
-    const { currency } = await this.parts.workshops.get(workshopId);
+    const { currency, defaultTaxCategory: taxCode } = await this.parts.workshops.get(workshopId);
     const earlier = await this.parts.estimates.ofJob(workshopId, at.jobId);
     const stageIds = card.content.money.terms.stages.map(() => newId());
-    const start = { title, seed: randomInt(1, 2 ** 32 - 1), restoration: job.kind === 'restoration', stageIds };
+    const start = {
+      title,
+      seed: randomInt(1, 2 ** 32 - 1),
+      restoration: job.kind === 'restoration',
+      stageIds,
+      taxCode,
+    };
     const row = await this.parts.estimates.insert(workshopId, {
       id: at.id,
       jobId: at.jobId,

@@ -13,6 +13,7 @@ const workshop: WorkshopFacts = {
   currency: 'EUR',
   lengthUnit: 'mm',
   timeZone: 'Europe/Dublin',
+  defaultTaxCategory: 'S',
 };
 
 /** What every test of a page or widget provides: the English words. */

@@ -2,6 +2,7 @@ import { existsSync, readFileSync } from 'node:fs';
 import { dirname, join } from 'node:path';
 import { create, type Font } from 'fontkit';
 import type { PaperFont } from './paper-colours';
+import { trueToText } from './true-to-text';
 
 const fileNames: Readonly<Record<PaperFont, string>> = {
   heading: 'alegreya-500.ttf',
@@ -27,7 +28,7 @@ let opened: Readonly<Record<PaperFont, Font>> | null = null;
  */
 export function paperFonts(): Readonly<Record<PaperFont, Font>> {
   const folder = fontFolder(__dirname);
-  const font = (name: PaperFont) => create(readFileSync(join(folder, fileNames[name])));
+  const font = (name: PaperFont) => trueToText(create(readFileSync(join(folder, fileNames[name]))));
   opened ??= { heading: font('heading'), text: font('text'), medium: font('medium'), bold: font('bold') };
   return opened;
 }

@@ -3,6 +3,7 @@ import type { AccessRequest } from '#shared/agreements/access-schema';
 import { giveAccess, listAccesses, revokeAccess } from '#shared/agreements/accesses-endpoints';
 import { beginVariation, readAgreement } from '#shared/agreements/agreement-endpoints';
 import { answerQuestion, listQuestions } from '#shared/agreements/questions-endpoints';
+import { listEstimates } from '#shared/estimates/estimates-endpoints';
 import { Api } from '../core/api/api';
 
 /** The calls about what a workshop and a client settle on a job. */
@@ -24,6 +25,12 @@ export class AgreementCalls {
 
   agreement(jobId: string, signal: AbortSignal) {
     return this.api.call(readAgreement, { params: { jobId }, signal });
+  }
+
+  /** How many variations were begun, whatever became of them. */
+  async variationsBegun(jobId: string): Promise<number> {
+    const { items } = await this.api.call(listEstimates, { params: { jobId } });
+    return items.filter(({ kind }) => kind === 'variation').length;
   }
 
   beginVariation(jobId: string, body: { id: string; title: string }) {

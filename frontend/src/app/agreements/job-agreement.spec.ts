@@ -42,6 +42,11 @@ const question = {
   ...{ text: 'Near a stove?', at: '2026-03-01T10:30:00.000Z' },
 };
 
+const estimate = (kind: 'estimate' | 'variation') => ({
+  ...{ id: id(61), kind, number: '1', title: '', letter: null, members: 0 },
+  changedAt: '2026-03-02T10:00:00.000Z',
+});
+
 async function open(given: { agreement?: object; questions?: object[]; roles?: readonly Role[] } = {}) {
   const { agreement = { contract: null, decisions: [] }, questions = [], roles = ['estimator'] } = given;
   const widget = await OpenedWidget.open(JobAgreement, { inputs: { job }, roles });
@@ -103,11 +108,11 @@ describe('JobAgreement', () => {
     const navigate = jest.spyOn(TestBed.inject(Router), 'navigate').mockResolvedValue(true);
     widget.button('Begin a variation')?.click();
     widget.button('Begin a variation')?.click();
-    await widget.settle();
+    await widget.answer(`/api/jobs/${job.id}/estimates`, { items: [estimate('estimate'), estimate('variation')] });
     const begun = widget.http.expectOne({ method: 'POST', url: `/api/jobs/${job.id}/variations` });
-    expect(begun.request.body).toEqual({ id: expect.stringMatching(/^[0-9a-f-]{36}$/), title: 'Variation 1' });
+    expect(begun.request.body).toEqual({ id: expect.stringMatching(/^[0-9a-f-]{36}$/), title: 'Variation 2' });
     begun.flush({
-      ...{ id: id(60), kind: 'variation', number: '2', title: 'Variation 1', letter: null, members: 0 },
+      ...{ id: id(60), kind: 'variation', number: '2', title: 'Variation 2', letter: null, members: 0 },
       changedAt: '2026-03-02T10:00:00.000Z',
     });
     await widget.settle();
@@ -117,6 +122,7 @@ describe('JobAgreement', () => {
   it('says why no variation could be begun', async () => {
     const widget = await open({ agreement: { contract: contract(part('1', 'estimate', 1)), decisions: [] } });
     await widget.press('Begin a variation');
+    await widget.answer(`/api/jobs/${job.id}/estimates`, { items: [] });
     await widget.refuse(`/api/jobs/${job.id}/variations`, 409, 'The workshop works in another currency now.');
     expect(TestBed.inject(Notices).current()[0]?.text).toBe('The workshop works in another currency now.');
     expect(widget.button('Begin a variation')?.disabled).toBe(false);

@@ -57,8 +57,8 @@ export class JobAgreement {
     if (this.isBusy()) return;
     this.isBusy.set(true);
     const jobId = this.job().id;
-    const number = this.contract()?.parts.length ?? 1;
     try {
+      const number = (await this.calls.variationsBegun(jobId)) + 1;
       const title = $localize`Variation ${number}:number:`;
       const { id } = await this.calls.beginVariation(jobId, { id: this.variationId, title });
       await this.router.navigate(['/jobs', jobId, 'estimates', id, 'measure']);

@@ -12,14 +12,16 @@ const arrived = (body: unknown, status = 200, headers: Readonly<Record<string, s
 });
 
 describe('answeredAhead', () => {
-  const answerTo = jest.spyOn(askedAhead, 'answerTo');
+  let answerTo: jest.SpiedFunction<typeof askedAhead.answerTo>;
   let http: HttpClient;
   let server: HttpTestingController;
   beforeEach(() => {
+    answerTo = jest.spyOn(askedAhead, 'answerTo');
     const providers = [provideHttpClient(withInterceptors([answeredAhead])), provideHttpClientTesting()];
     TestBed.configureTestingModule({ providers });
     [http, server] = [TestBed.inject(HttpClient), TestBed.inject(HttpTestingController)];
   });
+  afterEach(() => answerTo.mockRestore());
   const settled = () => new Promise((resolve) => setTimeout(resolve));
 
   it('takes what was asked ahead, and sends nothing', async () => {

@@ -1,15 +1,17 @@
-import { ChangeDetectionStrategy, Component, booleanAttribute, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, booleanAttribute, computed, inject, input } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton, MatIconButton } from '@angular/material/button';
 import type { InvoiceContent } from '#shared/invoices/invoice';
 import type { DocumentAllowanceOrCharge } from '#shared/invoices/invoice-lines';
 import type { MinorUnits } from '#shared/money/decimal';
 import type { AnyDocumentForm } from '../core/forms/document-form';
+import { Session } from '../core/session/session';
 import { AmountField } from '../ui/field/amount-field';
 import { DecimalField } from '../ui/field/decimal-field';
 import { EntryAt } from '../ui/field/entry-at';
 import { Icon } from '../ui/icon/icon';
 import { isRated, taxCodeChoices } from './tax-code-names';
+import { usualTax } from './usual-tax';
 
 /** What comes off or on, of a line or of the whole: a fixed amount, or a share of what it is taken from. */
 @Component({
@@ -20,6 +22,8 @@ import { isRated, taxCodeChoices } from './tax-code-names';
   styleUrl: './allowance-rows.scss',
 })
 export class AllowanceRows {
+  private readonly session = inject(Session);
+
   readonly form = input.required<AnyDocumentForm>();
   readonly path = input.required<string>();
   readonly currency = input.required<string>();
@@ -48,7 +52,7 @@ export class AllowanceRows {
 
   protected add(): void {
     const fresh = { charge: false, reason: '', reasonCode: null, amount: { way: 'fixed', amount_minor: null } };
-    const tax = this.form().value<InvoiceContent['lines']>('lines')?.at(0)?.tax ?? { code: 'S', percent: '' };
+    const tax = this.form().value<InvoiceContent['lines']>('lines')?.at(0)?.tax ?? usualTax(this.session);
     this.form().insert(this.path(), this.rows().length, this.withTax() ? { ...fresh, tax: { ...tax } } : fresh);
   }
 

@@ -12,6 +12,7 @@ import { documentForm } from '../core/forms/document-form';
 import { newId } from '../core/new-id';
 import { Notices } from '../core/problems/notices';
 import { ProblemError } from '../core/problems/problem-error';
+import { Session } from '../core/session/session';
 import { TwoSides } from '../jobs';
 import { Confirm } from '../ui/dialog/confirm';
 import { Entry } from '../ui/field/entry';
@@ -30,6 +31,7 @@ import { InvoiceCalls } from './invoice-calls';
 import { InvoiceStore } from './invoice-store';
 import { InvoiceSums } from './invoice-sums';
 import { issueQuestion } from './issue-question';
+import { usualTax } from './usual-tax';
 
 /** The tax categories anything on it stands under. */
 const usedCodes = ({ lines, allowancesCharges }: Pick<InvoiceContent, 'lines' | 'allowancesCharges'>) =>
@@ -63,6 +65,7 @@ export class InvoiceDraft {
   private readonly router = inject(Router);
   private readonly notices = inject(Notices);
   private readonly confirm = inject(Confirm);
+  private readonly session = inject(Session);
   protected readonly formats = inject(Formats);
   private readonly key = new DeedKey();
 
@@ -118,7 +121,7 @@ export class InvoiceDraft {
     const before = this.content().lines.at(-1);
     this.form.insert('lines', this.lines().length, {
       ...{ id: newId(), name: '', description: '', quantity: '1', unit: 'C62', price: '' },
-      ...{ baseQuantity: '1', allowancesCharges: [], tax: { ...(before?.tax ?? { code: 'S', percent: '' }) } },
+      ...{ baseQuantity: '1', allowancesCharges: [], tax: { ...(before?.tax ?? usualTax(this.session)) } },
     });
   }
 

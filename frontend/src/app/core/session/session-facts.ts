@@ -8,6 +8,8 @@ export interface WorkshopFacts {
   readonly currency: string;
   readonly lengthUnit: 'mm' | 'in';
   readonly timeZone: string;
+  /** What its invoices usually stand under, as a code of UNCL 5305. */
+  readonly defaultTaxCategory: string;
 }
 
 /** How figures are written for whoever reads. */
