@@ -157,6 +157,16 @@ describe('the estimate as a paper', () => {
     expect(text).not.toContain('Ready in');
   });
 
+  it('speaks of tax included only where there is some', async () => {
+    const texts = ['standard', 'outside-scope'].map(async (taxCategoryId) =>
+      textOfPaper(await estimateOf(sampleSnapshot(smallDraft({ taxCategoryId })))),
+    );
+    const [taxed = '', untaxed = ''] = await Promise.all(texts);
+    expect(taxed.match(/tax (is )?included/gi)).toHaveLength(2);
+    expect(untaxed).not.toMatch(/tax (is )?included/i);
+    expect(untaxed).toContain('The deposit is recovered from each stage');
+  });
+
   it.each(['members', 'kinds'] as const)('comes by %s to sections that sum to the lines', async (presentation) => {
     const snapshot = sampleSnapshot(smallDraft({ presentation }));
     const { lines, subtotal_minor } = snapshot.figures.price;

@@ -35,7 +35,7 @@ export const documents = {
   'paper-tax': '{name}: {rate_percent} of {net_minor}',
   'paper-untaxed': '{name}, on {net_minor}',
   'paper-total': 'Total',
-  'paper-total-with-tax': '{total_minor}, tax included',
+  'paper-total-of-all': '{taxed, select, yes {{total_minor}, tax included} other {{total_minor}}}',
 
   'paper-alternatives': 'Other ways of doing it',
   'paper-alternatives-note':
@@ -63,7 +63,7 @@ export const documents = {
   'paper-stage-first-release': 'First half of what is held back, on completion',
   'paper-stage-second-release': 'Second half, once defects have been made good',
   'paper-payment-note':
-    'Tax is included. The deposit is recovered from each stage in proportion to the work it pays for.',
+    '{taxed, select, yes {Tax is included. } other {}}The deposit is recovered from each stage in proportion to the work it pays for.',
 
   'paper-takes-away':
     '{amount} is taken off what was agreed, tax included. A credit note gives it back: off what is still open of the invoices, else as a credit or a repayment, whichever you like.',

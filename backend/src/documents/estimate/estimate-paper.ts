@@ -13,6 +13,7 @@ import { careBlocks, cautionBlocks } from './care-blocks';
 import { alternativesBlocks } from './alternatives-blocks';
 import { buildUpBlocks, memberDrawingBlocks } from './drawing-blocks';
 import { holdingBlocks } from './holding-blocks';
+import { isTaxed } from './is-taxed';
 import { issueContent, type IssueContent } from './issue-content';
 import { paperNames, titleOf } from './paper-names';
 import { paymentBlocks } from './payment-blocks';
@@ -23,6 +24,8 @@ import { timeBlocks } from './time-blocks';
 function addressOf(pdf: Pdf, { snapshot, words }: IssueContent): Block {
   const { client, job, issuedOn, validUntil, issuedBy, estimate, figures } = snapshot;
   const { kind, varies } = paperNames(snapshot, words);
+  const { gross_minor } = figures.price;
+  const taxed = isTaxed(figures.price) ? 'yes' : 'no';
   return addressBlock(pdf, {
     address: [client.name, client.contact, client.address],
     particulars: [
@@ -34,7 +37,7 @@ function addressOf(pdf: Pdf, { snapshot, words }: IssueContent): Block {
       [words.say('paper-reference'), job.reference],
       [words.say('paper-site'), job.site],
       [words.say('paper-issued-by'), issuedBy],
-      [words.say('paper-total'), words.say('paper-total-with-tax', { total_minor: figures.price.gross_minor })],
+      [words.say('paper-total'), words.say('paper-total-of-all', { total_minor: gross_minor, taxed })],
     ],
   });
 }

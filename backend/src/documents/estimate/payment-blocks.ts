@@ -6,6 +6,7 @@ import { sectionBlocks } from '../paper/section-blocks';
 import { tableBlock, type TableColumn, type TableRow } from '../paper/table-block';
 import { textBlock } from '../paper/text-block';
 import type { PaperWords } from '../paper-words';
+import { isTaxed } from './is-taxed';
 import type { IssueContent } from './issue-content';
 
 function rowName({ say }: PaperWords, row: PaymentRow): string {
@@ -73,11 +74,12 @@ export function paymentBlocks(pdf: Pdf, content: IssueContent): Block[] {
     ],
     above: 'strong',
   };
+  const taxed = isTaxed(snapshot.figures.price) ? 'yes' : 'no';
   const planned = rows.map((row) => planRow(columns, row));
   const isShort = planned.length <= 12;
   const kept = planned.map((row, place) => ({ ...row, keepsWithNext: isShort || place === planned.length - 1 }));
   return sectionBlocks(pdf, words.say('paper-payment'), [
     tableBlock(pdf, columns, [...kept, total]),
-    textBlock(pdf, words.say('paper-payment-note'), { style: textStyles.note, before_pt: 3 }),
+    textBlock(pdf, words.say('paper-payment-note', { taxed }), { style: textStyles.note, before_pt: 3 }),
   ]);
 }
