@@ -98,7 +98,8 @@ describe('an invitation', () => {
     expect((await api.as('owner').call(invite, { body, key: randomUUID() })).status).toBe(200);
     const [mail] = await api.mails();
     expect(mail?.text).toContain('{{7*7}} ${7*7} <%= 7*7 %> {workshop}');
-    expect(mail?.text).not.toContain('49');
+    // The secret of the link is drawn by chance, and may have the figure in it.
+    expect(mail?.text.replace(/#\S+/, '')).not.toContain('49');
   });
 });
 
