@@ -1,5 +1,5 @@
 const { mkdirSync, readdirSync, rmSync, writeFileSync } = require('node:fs');
-const { dirname, join, relative } = require('node:path');
+const { dirname, join } = require('node:path');
 const config = require('../jest.config.cjs');
 const long_seconds = require('./long-specs.json');
 
@@ -25,7 +25,7 @@ const folder = join(root, '.cache/together');
 const specsOf = (name) =>
   readdirSync(join(root, name), { recursive: true })
     .filter((file) => file.endsWith('.spec.ts'))
-    .map((file) => relative(root, join(root, name, file)));
+    .map((file) => join(name, file));
 
 /** What took long in an earlier run is known; all else is short. A figure that is out of date costs evenness and nothing else. */
 const secondsOf = (spec) => long_seconds[spec] ?? 1;

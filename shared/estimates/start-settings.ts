@@ -1,14 +1,10 @@
 import type { EstimateSettings } from '#shared/estimates/settings';
 import type { RateCard } from '#shared/rate-cards/rate-card';
-import { usualTaxOf } from '#shared/rate-cards/usual-tax-of';
 
-/**
- * What an estimate begins with: the card's own air and terms, the tax of the code the workshop usually works under (UNCL 5305), prices that
- * hold for 60 days and leaf prices as the card says.
- */
+/** What an estimate begins with: the card's own air, terms and tax, prices that hold for 60 days and leaf prices as the card says. */
 export function startSettings(
   card: RateCard,
-  start: { title: string; seed: number; restoration: boolean; stageIds: readonly string[]; taxCode?: string },
+  start: { title: string; seed: number; restoration: boolean; stageIds: readonly string[] },
 ): EstimateSettings {
   const { drying, money } = card;
   return {
@@ -22,7 +18,7 @@ export function startSettings(
     profit: null,
     contingency: null,
     discount: null,
-    taxCategoryId: usualTaxOf(money, start.taxCode ?? 'S'),
+    taxCategoryId: money.defaultTaxCategoryId,
     extras: [],
     alternatives: [],
     stages: {

@@ -36,12 +36,12 @@ async function taxOfNewEstimate(workshopId: string, estimateId: string): Promise
   return money.taxCategories.find(({ id }) => id === settings.taxCategoryId)?.code;
 }
 
-test('the usual tax category is what new estimates begin with, and a page is told of it', async () => {
+test('the usual tax category is what a page is told for invoices; estimates keep to the card', async () => {
   const taxOf = async () => taxOfNewEstimate(api.ours.id, (await sampleEstimate(api.ours)).estimateId);
   const told = async () => (await owner().call(readSession)).body as SessionAnswer;
   expect([await taxOf(), (await told()).signedIn?.workshop?.defaultTaxCategory]).toEqual(['S', 'S']);
   expect((await change({ defaultTaxCategory: 'O' })).status).toBe(200);
-  expect([await taxOf(), (await told()).signedIn?.workshop?.defaultTaxCategory]).toEqual(['O', 'O']);
+  expect([await taxOf(), (await told()).signedIn?.workshop?.defaultTaxCategory]).toEqual(['S', 'O']);
   expect((await change({})).status).toBe(200);
 });
 
@@ -58,6 +58,8 @@ test('a workshop where no value added tax is levied begins outside its scope', a
     api.app.accounts.workshops.found({ accountId, name }, habits),
   );
   expect((await api.app.accounts.workshops.get(id)).defaultTaxCategory).toBe('O');
+  const { money } = (await api.app.rateCards.service.inForce(id)).content;
+  expect(money.taxCategories.find((tax) => tax.id === money.defaultTaxCategoryId)?.code).toBe('O');
 });
 
 test.each([

@@ -1,5 +1,5 @@
 import { v7 as newId } from 'uuid';
-import { usualTaxCategory } from '#shared/accounts/usual-tax-category';
+import { startTaxCategory } from '#shared/accounts/start-tax-category';
 import type { NewWorkshop, WorkshopSettings } from '#shared/accounts/workshop-schema';
 import type { Actor } from '#shared/actor/actor';
 import type { Role } from '#shared/actor/role';
@@ -63,7 +63,7 @@ export class WorkshopService {
     const workshopId = newId();
     const start = { ...emptySettings, addressLines: [...emptySettings.addressLines], logoFileId: null, version: 1 };
     const createdAt = this.parts.clock.now();
-    const defaultTaxCategory = usualTaxCategory(workshop.country);
+    const defaultTaxCategory = startTaxCategory(workshop.country);
     await this.parts.workshops.insert({ ...workshop, ...start, defaultTaxCategory, id: workshopId, createdAt });
     await this.join(workshopId, { ...owner, roles: ['owner'] });
     await this.record({ workshopId, ...owner }, 'history-workshop-founded', { after: workshop });

@@ -51,14 +51,6 @@ export interface Begun {
   readonly kind: EstimateKind;
 }
 
-/** The settings of a new estimate, with a seed and stages of its own. */
-const begunWith = (card: RateCard, start: { title: string; taxCode: string; restoration: boolean }) =>
-  startSettings(card, {
-    ...start,
-    seed: randomInt(1, 2 ** 32 - 1),
-    stageIds: card.money.terms.stages.map(() => newId()),
-  });
-
 /** Drafts of estimates: beginning, reading and changing them, and the card they are worked on. */
 export class EstimateService {
   constructor(private readonly parts: EstimateParts) {}
@@ -78,9 +70,10 @@ export class EstimateService {
     const known = await this.parts.estimates.find(workshopId, at.id);
     if (known) return this.same(known, at.jobId, kind);
     const card = await this.parts.cards.inForce(workshopId);
-    const { currency, defaultTaxCategory: taxCode } = await this.parts.workshops.get(workshopId);
+    const { currency } = await this.parts.workshops.get(workshopId);
     const earlier = await this.parts.estimates.ofJob(workshopId, at.jobId);
-    const start = { title, taxCode, restoration: job.kind === 'restoration' };
+    const stageIds = card.content.money.terms.stages.map(() => newId());
+    const start = { title, seed: randomInt(1, 2 ** 32 - 1), restoration: job.kind === 'restoration', stageIds };
     const row = await this.parts.estimates.insert(workshopId, {
       id: at.id,
       jobId: at.jobId,
@@ -89,7 +82,7 @@ export class EstimateService {
       version: 1,
       rateCardId: card.id,
       currency,
-      settings: begunWith(card.content, start),
+      settings: startSettings(card.content, start),
       settingsVersion: 1,
       members: 0,
       letter: null,

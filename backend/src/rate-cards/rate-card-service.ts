@@ -1,7 +1,7 @@
 import { v7 as newId } from 'uuid';
 import { cardDifferences, type CardDifference } from '#shared/rate-cards/card-differences';
 import type { RateCard } from '#shared/rate-cards/rate-card';
-import { startCard } from '#shared/rate-cards/start-card';
+import { startCardUnder } from '#shared/rate-cards/start-card-under';
 import { dayOfInstant } from '#shared/calendar/day-of-instant';
 import { Rejection } from '#shared/problems/rejection';
 import type { WorkshopService } from '../accounts';
@@ -85,13 +85,14 @@ export class RateCardService {
 
   private async plantStartCard(by: Doer): Promise<void> {
     const id = newId();
+    const { defaultTaxCategory } = await this.parts.workshops.get(by.workshopId);
     await this.parts.cards.insert(by.workshopId, {
       id,
       version: 1,
       name: 'House values to start from',
       inForceFrom: beginning,
       basedOnId: null,
-      content: startCard,
+      content: startCardUnder(defaultTaxCategory),
       changedAt: this.parts.clock.now(),
     });
     await this.parts.audit.record(by, { subject: { kind: 'rate-card', id }, code: 'history-rate-card-planted' });

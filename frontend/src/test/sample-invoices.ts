@@ -8,6 +8,7 @@ import type { Role } from '#shared/actor/role';
 import type { Invoice, InvoiceSummary } from '#shared/invoices/invoice-schema';
 import { SESSION_PORT } from '../app/core/session/session-port';
 import { Confirm } from '../app/ui/dialog/confirm';
+import type { WorkshopFacts } from '../app/core/session/session-facts';
 import { signIn, words } from './sign-in';
 
 export const invoiceId = (number: number): string => `018f0000-0000-7000-8000-0000000002${number}`;
@@ -63,6 +64,13 @@ interface Question {
   readonly yes: string;
 }
 
+interface Visiting {
+  readonly path: string;
+  readonly address: string;
+  readonly roles?: readonly Role[];
+  readonly settings?: Partial<WorkshopFacts>;
+}
+
 /** One page of accounts under its address, with what it asks the server for in one's own hands. */
 export class BooksVisit {
   private readonly http = TestBed.inject(HttpTestingController);
@@ -73,7 +81,7 @@ export class BooksVisit {
     readonly questions: readonly Question[],
   ) {}
 
-  static async begin(page: Type<unknown>, at: { path: string; address: string; roles?: readonly Role[] }) {
+  static async begin(page: Type<unknown>, at: Visiting) {
     const questions: Question[] = [];
     const confirm = { ask: (question: Question) => (questions.push(question), Promise.resolve(true)) };
     TestBed.configureTestingModule({
@@ -89,7 +97,7 @@ export class BooksVisit {
         ),
       ],
     });
-    signIn(at.roles ?? ['office']);
+    signIn(at.roles ?? ['office'], at.settings);
     const visit = new BooksVisit(await RouterTestingHarness.create(at.address), questions);
     await visit.settle();
     return visit;

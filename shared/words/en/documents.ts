@@ -35,11 +35,11 @@ export const documents = {
   'paper-tax': '{name}: {rate_percent} of {net_minor}',
   'paper-untaxed': '{name}, on {net_minor}',
   'paper-total': 'Total',
-  'paper-total-of-all': '{taxed, select, yes {{total_minor}, tax included} other {{total_minor}}}',
+  'paper-total-of-all': '{total_minor}{taxed, select, yes {, tax included} other {}}',
 
   'paper-alternatives': 'Other ways of doing it',
   'paper-alternatives-note':
-    '{chosen, select, none {Each is counted by itself against the total above, tax included.} other {Each is counted by itself against the work without any of them, tax included. Those the total above already holds are marked.}}',
+    '{chosen, select, none {Each is counted by itself against the total above{taxed, select, yes {, tax included} other {}}.} other {Each is counted by itself against the work without any of them{taxed, select, yes {, tax included} other {}}. Those the total above already holds are marked.}}',
   'paper-column-alternative': 'Instead',
   'paper-column-ready-in': 'Ready in',
   'paper-alternative-weeks': '{weeks, plural, one {one week} other {# weeks}}',
@@ -66,7 +66,7 @@ export const documents = {
     '{taxed, select, yes {Tax is included. } other {}}The deposit is recovered from each stage in proportion to the work it pays for.',
 
   'paper-takes-away':
-    '{amount} is taken off what was agreed, tax included. A credit note gives it back: off what is still open of the invoices, else as a credit or a repayment, whichever you like.',
+    '{amount} is taken off what was agreed{taxed, select, yes {, tax included} other {}}. A credit note gives it back: off what is still open of the invoices, else as a credit or a repayment, whichever you like.',
 
   'paper-time': 'Time',
   'paper-time-weeks':

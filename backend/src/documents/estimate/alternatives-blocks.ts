@@ -74,7 +74,7 @@ export function alternativesBlocks(pdf: Pdf, content: IssueContent): Block[] {
     { head: say('paper-column-difference'), width: 'fit', align: 'right' },
   ] as const;
   return sectionBlocks(pdf, say('paper-alternatives'), [
-    textBlock(pdf, say('paper-alternatives-note', { chosen }), { style: textStyles.note }),
+    textBlock(pdf, say('paper-alternatives-note', { chosen, taxed: content.taxed }), { style: textStyles.note }),
     tableBlock(pdf, columns, rows),
   ]);
 }

@@ -13,7 +13,6 @@ import { careBlocks, cautionBlocks } from './care-blocks';
 import { alternativesBlocks } from './alternatives-blocks';
 import { buildUpBlocks, memberDrawingBlocks } from './drawing-blocks';
 import { holdingBlocks } from './holding-blocks';
-import { isTaxed } from './is-taxed';
 import { issueContent, type IssueContent } from './issue-content';
 import { paperNames, titleOf } from './paper-names';
 import { paymentBlocks } from './payment-blocks';
@@ -21,11 +20,10 @@ import { priceTable } from './price-table';
 import { programmeBlocks } from './programme-blocks';
 import { timeBlocks } from './time-blocks';
 
-function addressOf(pdf: Pdf, { snapshot, words }: IssueContent): Block {
+function addressOf(pdf: Pdf, { snapshot, words, taxed }: IssueContent): Block {
   const { client, job, issuedOn, validUntil, issuedBy, estimate, figures } = snapshot;
   const { kind, varies } = paperNames(snapshot, words);
-  const { gross_minor } = figures.price;
-  const taxed = isTaxed(figures.price) ? 'yes' : 'no';
+  const { gross_minor: total_minor } = figures.price;
   return addressBlock(pdf, {
     address: [client.name, client.contact, client.address],
     particulars: [
@@ -37,7 +35,7 @@ function addressOf(pdf: Pdf, { snapshot, words }: IssueContent): Block {
       [words.say('paper-reference'), job.reference],
       [words.say('paper-site'), job.site],
       [words.say('paper-issued-by'), issuedBy],
-      [words.say('paper-total'), words.say('paper-total-of-all', { total_minor: gross_minor, taxed })],
+      [words.say('paper-total'), words.say('paper-total-of-all', { total_minor, taxed })],
     ],
   });
 }

@@ -9,6 +9,8 @@ export interface IssueContent {
   readonly snapshot: Snapshot;
   readonly draft: Draft;
   readonly words: PaperWords;
+  /** Whether its price has any tax in it, so that a paper may say it is included. */
+  readonly taxed: 'yes' | 'no';
 }
 
 /** Puts an issue together with the words its papers are written in. */
@@ -16,6 +18,7 @@ export const issueContent = (snapshot: Snapshot): IssueContent => ({
   snapshot,
   draft: chosenDraft(snapshot.draft, snapshot.choice),
   words: paperWords(snapshot.workshop),
+  taxed: snapshot.figures.price.taxes.some(({ tax_minor }) => tax_minor !== 0) ? 'yes' : 'no',
 });
 
 /** A member by its id, of the base or of any alternative. */

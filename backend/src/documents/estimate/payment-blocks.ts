@@ -6,7 +6,6 @@ import { sectionBlocks } from '../paper/section-blocks';
 import { tableBlock, type TableColumn, type TableRow } from '../paper/table-block';
 import { textBlock } from '../paper/text-block';
 import type { PaperWords } from '../paper-words';
-import { isTaxed } from './is-taxed';
 import type { IssueContent } from './issue-content';
 
 function rowName({ say }: PaperWords, row: PaymentRow): string {
@@ -56,14 +55,16 @@ function planRow(columns: readonly PlanColumn[], row: PaymentRow): TableRow {
 }
 
 /** What is taken away has no plan: it is given back. */
-function takenAwayBlocks(pdf: Pdf, { words, snapshot }: IssueContent): Block[] {
+function takenAwayBlocks(pdf: Pdf, { words, snapshot, taxed }: IssueContent): Block[] {
   const amount = words.money(Math.abs(snapshot.figures.price.gross_minor));
-  return sectionBlocks(pdf, words.say('paper-payment'), [textBlock(pdf, words.say('paper-takes-away', { amount }))]);
+  return sectionBlocks(pdf, words.say('paper-payment'), [
+    textBlock(pdf, words.say('paper-takes-away', { amount, taxed })),
+  ]);
 }
 
 /** The plan of payment: deposit, stages, releases, and the total they come to. */
 export function paymentBlocks(pdf: Pdf, content: IssueContent): Block[] {
-  const { words, draft, snapshot } = content;
+  const { words, draft, snapshot, taxed } = content;
   if (snapshot.figures.price.gross_minor < 0) return takenAwayBlocks(pdf, content);
   const { rows, sum_minor } = paymentRows(draft.settings.stages, snapshot.figures.stages);
   const columns = planColumns(words, rows);
@@ -74,7 +75,6 @@ export function paymentBlocks(pdf: Pdf, content: IssueContent): Block[] {
     ],
     above: 'strong',
   };
-  const taxed = isTaxed(snapshot.figures.price) ? 'yes' : 'no';
   const planned = rows.map((row) => planRow(columns, row));
   const isShort = planned.length <= 12;
   const kept = planned.map((row, place) => ({ ...row, keepsWithNext: isShort || place === planned.length - 1 }));

@@ -77,6 +77,12 @@ describe('ClientIssuePage', () => {
     expect(visit.element.querySelector('.bar .muted')?.textContent).toBe('tax included');
   });
 
+  it('speaks of no tax where none is in the sum', async () => {
+    const price = { ...clientPrice(5_000_00), taxes: [], tax_minor: 0 };
+    const visit = await ClientVisit.begin(clientIssue({ price }));
+    expect(visit.element.querySelector('.bar .muted')?.textContent).toBe('');
+  });
+
   it('says why it cannot be shown, and how to come to one’s papers all the same', async () => {
     const visit = await ClientVisit.begin();
     visit.fixture.componentRef.setInput('issueId', clientId(99));

@@ -72,9 +72,11 @@ export class ClientIssuePage {
     (this.store.issue()?.varies ?? []).map((one) => this.words.say('paper-varies-one', { ...one })).join('; '),
   );
   protected readonly underSum = computed(() => {
+    const isTaxed = this.store.price()?.tax_minor !== 0;
     const programme = this.store.programme();
-    if (!programme) return $localize`tax included`;
-    return $localize`tax included, ready by ${this.formats.day(programme.offeredOn, 'short')}:day:`;
+    if (!programme) return isTaxed ? $localize`tax included` : '';
+    const day = this.formats.day(programme.offeredOn, 'short');
+    return isTaxed ? $localize`tax included, ready by ${day}:day:` : $localize`ready by ${day}:day:`;
   });
 
   constructor() {

@@ -11,7 +11,7 @@ import { DecimalField } from '../ui/field/decimal-field';
 import { EntryAt } from '../ui/field/entry-at';
 import { Icon } from '../ui/icon/icon';
 import { isRated, taxCodeChoices } from './tax-code-names';
-import { usualTax } from './usual-tax';
+import { firstTax } from './first-tax';
 
 /** What comes off or on, of a line or of the whole: a fixed amount, or a share of what it is taken from. */
 @Component({
@@ -52,7 +52,7 @@ export class AllowanceRows {
 
   protected add(): void {
     const fresh = { charge: false, reason: '', reasonCode: null, amount: { way: 'fixed', amount_minor: null } };
-    const tax = this.form().value<InvoiceContent['lines']>('lines')?.at(0)?.tax ?? usualTax(this.session);
+    const tax = this.form().value<InvoiceContent['lines']>('lines')?.at(0)?.tax ?? firstTax(this.session);
     this.form().insert(this.path(), this.rows().length, this.withTax() ? { ...fresh, tax: { ...tax } } : fresh);
   }
 

@@ -31,7 +31,7 @@ import { InvoiceCalls } from './invoice-calls';
 import { InvoiceStore } from './invoice-store';
 import { InvoiceSums } from './invoice-sums';
 import { issueQuestion } from './issue-question';
-import { usualTax } from './usual-tax';
+import { firstTax } from './first-tax';
 
 /** The tax categories anything on it stands under. */
 const usedCodes = ({ lines, allowancesCharges }: Pick<InvoiceContent, 'lines' | 'allowancesCharges'>) =>
@@ -121,7 +121,7 @@ export class InvoiceDraft {
     const before = this.content().lines.at(-1);
     this.form.insert('lines', this.lines().length, {
       ...{ id: newId(), name: '', description: '', quantity: '1', unit: 'C62', price: '' },
-      ...{ baseQuantity: '1', allowancesCharges: [], tax: { ...(before?.tax ?? usualTax(this.session)) } },
+      ...{ baseQuantity: '1', allowancesCharges: [], tax: { ...(before?.tax ?? firstTax(this.session)) } },
     });
   }
 

@@ -8,10 +8,12 @@ import { InvoicePage } from './invoice-page';
 const address = `/api/invoices/${invoiceId(10)}`;
 const rested_ms = 800;
 
-const begin = async (invoice: Invoice, roles?: Parameters<typeof BooksVisit.begin>[1]['roles']) => {
+type Visiting = Parameters<typeof BooksVisit.begin>[1];
+
+const begin = async (invoice: Invoice, roles: Visiting['roles'] = ['office'], settings: Visiting['settings'] = {}) => {
   const visit = await BooksVisit.begin(InvoicePage, {
     ...{ path: 'accounts/invoices/:invoiceId', address: `/accounts/invoices/${invoice.id}` },
-    ...(roles ? { roles } : {}),
+    ...{ roles, settings },
   });
   await visit.answer('GET', `/api/invoices/${invoice.id}`, invoice);
   return visit;
@@ -29,6 +31,24 @@ describe('InvoicePage, a draft', () => {
     const { request } = visit.request('PUT', address);
     expect(request.headers.get('if-match')).toBe('"3"');
     expect((request.body as Invoice['content']).lines.map(({ quantity }) => quantity)).toEqual(['3', '1']);
+  });
+
+  it.each([
+    ['S', ''],
+    ['O', '0'],
+  ] as const)('begins a first line with the workshop’s usual tax category %s', async (code, percent) => {
+    const draft = sampleDraft();
+    const bare = { ...draft, content: { ...draft.content, lines: [] } };
+    const visit = await begin(bare, ['office'], { defaultTaxCategory: code });
+    await visit.press('Add a line');
+    expect(visit.entry('Tax').value).toContain(code);
+    expect(visit.text.includes('Rate')).toBe(percent === '');
+    await visit.type('What', 'Cleaning');
+    await visit.type('Price of one', '80.00');
+    if (percent === '') await visit.type('Rate', '20');
+    await visit.settle(rested_ms);
+    const [line] = (visit.request('PUT', address).request.body as Invoice['content']).lines;
+    expect(line?.tax).toEqual({ code, percent: percent || '20' });
   });
 
   it('takes a price for several of what is counted, and comes to what that makes', async () => {

@@ -4,4 +4,4 @@ import type { TaxCategory } from '#shared/accounts/workshop-options';
 const withoutVat: ReadonlySet<string> = new Set(['BM', 'BN', 'HK', 'KW', 'KY', 'MO', 'QA', 'US']);
 
 /** The tax category a workshop of a country (ISO 3166-1) begins with, as a code of UNCL 5305: its own to change. */
-export const usualTaxCategory = (country: string): TaxCategory => (withoutVat.has(country) ? 'O' : 'S');
+export const startTaxCategory = (country: string): TaxCategory => (withoutVat.has(country) ? 'O' : 'S');

@@ -3,7 +3,7 @@ import type { Session } from '../core/session/session';
 import { isRated } from './tax-code-names';
 
 /** The tax a first line begins with: as the workshop usually works, with its rate still to be entered. */
-export function usualTax(session: Session): { code: TaxCode; percent: string } {
+export function firstTax(session: Session): { code: TaxCode; percent: string } {
   const code = (session.workshop()?.defaultTaxCategory ?? 'S') as TaxCode;
   return { code, percent: isRated(code) ? '' : '0' };
 }

@@ -1,4 +1,4 @@
-import { usualTaxCategory } from '#shared/accounts/usual-tax-category';
+import { startTaxCategory } from '#shared/accounts/start-tax-category';
 
 test.each([
   ['AT', 'S'],
@@ -6,5 +6,5 @@ test.each([
   ['US', 'O'],
   ['HK', 'O'],
 ])('a workshop in %s begins with the tax category %s', (country, code) => {
-  expect(usualTaxCategory(country)).toBe(code);
+  expect(startTaxCategory(country)).toBe(code);
 });
