@@ -30,15 +30,22 @@ const settings = [
   '--max-connections=100',
 ];
 
+/**
+ * A folder of one server's own, short enough for its socket. Its temporary tables go there too: MariaDB clears whatever looks like one
+ * as it starts, and in a folder shared with another server takes away what that one is working on.
+ */
+const ownFolder = () => mkdtempSync(join(tmpdir(), 'bw-'));
+
 /** Makes an empty database in a folder that does not exist yet. */
 export async function installDatabase(folder) {
+  const temporary = ownFolder();
   const options = ['--auth-root-authentication-method=normal', '--skip-test-db', '--innodb-log-file-size=16M'];
-  await promisify(execFile)(program('mariadb-install-db'), [
-    '--no-defaults',
-    ...asUser,
-    `--datadir=${folder}`,
-    ...options,
-  ]);
+  const places = [`--datadir=${folder}`, `--tmpdir=${temporary}`];
+  try {
+    await promisify(execFile)(program('mariadb-install-db'), ['--no-defaults', ...asUser, ...places, ...options]);
+  } finally {
+    rmSync(temporary, { recursive: true, force: true });
+  }
 }
 
 /** Resolves when a server greets at an address; MariaDB speaks first. */
@@ -78,11 +85,12 @@ export async function endLeftover(folder) {
  * apart from this process group, so that Ctrl+C reaches it only through `stop`.
  */
 export async function startDatabase({ folder, port, isThrowAway = false }) {
-  const socketFolder = mkdtempSync(join(tmpdir(), 'bw-'));
-  const socket = join(socketFolder, 's');
+  const own = ownFolder();
+  const socket = join(own, 's');
   const log = `${folder}.log`;
   const place = port ? ['--bind-address=127.0.0.1', `--port=${port}`] : ['--skip-networking'];
-  const files = [`--datadir=${folder}`, `--socket=${socket}`, `--pid-file=${folder}.pid`, `--log-error=${log}`];
+  const kept = [`--datadir=${folder}`, `--pid-file=${folder}.pid`, `--log-error=${log}`];
+  const files = [...kept, `--socket=${socket}`, `--tmpdir=${own}`];
   const safety = isThrowAway ? throwAway : durable;
   const child = spawn(program('mariadbd'), ['--no-defaults', ...asUser, ...files, ...place, ...settings, ...safety], {
     detached: true,
@@ -91,7 +99,7 @@ export async function startDatabase({ folder, port, isThrowAway = false }) {
   child.on('error', () => undefined);
   const stop = async () => {
     if (child.exitCode === null && child.pid) await endProcess(child.pid);
-    rmSync(socketFolder, { recursive: true, force: true });
+    rmSync(own, { recursive: true, force: true });
   };
   if (!(await waitForGreeting(port ? { port, host: '127.0.0.1' } : { path: socket }, child))) {
     await stop();

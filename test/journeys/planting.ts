@@ -1,9 +1,9 @@
 import * as z from 'zod';
 import type { Endpoint } from '#shared/actor/endpoint';
 
-/** What each of the templates below would come to if anything worked it out. */
-export const workedOut = '8309';
-const templates = '{{7*1187}}${7*1187}<%= 7*1187 %>#{7*1187}';
+/** What each of the templates below would come to if anything worked it out; too long to stand in a secret or a hash by chance. */
+export const workedOut = '9953054';
+const templates = '{{998*9973}}${998*9973}<%= 998*9973 %>#{998*9973}';
 
 /** Ways text has become script, markup, style, address or template elsewhere (OWASP on cross-site scripting and injection). */
 export const hostileTexts: readonly string[] = [
@@ -23,7 +23,7 @@ export const hostileTexts: readonly string[] = [
   '<math><mtext></table><img src=x onerror=alert(1)>',
 ];
 /** For entries of twenty characters. */
-const shortText = '<b>{{7*1187}}';
+const shortText = '<b>{{998*9973}}';
 
 /** What nobody may read anywhere. */
 const secret = /^(password|token|current)$/;
