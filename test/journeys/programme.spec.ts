@@ -1,6 +1,8 @@
 import { v7 as newId } from 'uuid';
 import type { Change } from '#shared/estimates/change-schema';
 import { changeEstimate } from '#shared/estimates/estimates-endpoints';
+import { addDays } from '#shared/calendar/add-days';
+import { keepProgramme } from '#shared/programme/programme-endpoints';
 import { sampleEstimate, sampleMember, type SampleEstimate } from '../api/sample-estimate';
 import { markedIssue, programmeOf, shopWith } from '../api/sample-programme';
 import { done } from './stage';
@@ -30,6 +32,15 @@ async function threeBuildUps(): Promise<SampleEstimate> {
   return sample;
 }
 
+/** It begins on the morning of a Wednesday to come: so its work falls on the same hours whenever this is run. */
+async function fromWednesday({ estimateId }: SampleEstimate): Promise<void> {
+  const { inputs, version } = await programmeOf(walk.api.ours, estimateId);
+  let { day } = inputs;
+  do day = addDays(day, 1);
+  while (new Date(`${day}T12:00:00Z`).getUTCDay() !== 3);
+  await done(walk, keepProgramme, { params: { estimateId }, version, body: { ...inputs, day } });
+}
+
 /** Plans in the browser and keeps what came of it. */
 async function plan({ page }: Person, sample: SampleEstimate): Promise<void> {
   await page.goto(placeOf(sample));
@@ -40,6 +51,7 @@ async function plan({ page }: Person, sample: SampleEstimate): Promise<void> {
 
 it('plans a job of three build-ups, is told what breaks a window, and keeps nothing that is impossible', async () => {
   const sample = await threeBuildUps();
+  await fromWednesday(sample);
   const person = await walk.as('estimator');
   const { page, complaints, see } = person;
   await plan(person, sample);
