@@ -1,5 +1,5 @@
 import { execFile, spawn } from 'node:child_process';
-import { existsSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { existsSync, mkdirSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { connect } from 'node:net';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
@@ -31,21 +31,24 @@ const settings = [
 ];
 
 /**
- * A folder of one server's own, short enough for its socket. Its temporary tables go there too: MariaDB clears whatever looks like one
- * as it starts, and in a folder shared with another server takes away what that one is working on.
+ * Where the temporary tables of a database go, beside it and its alone: as it starts MariaDB clears away whatever looks like one, and in a
+ * folder shared with another server that would be what the other is working on.
  */
-const ownFolder = () => mkdtempSync(join(tmpdir(), 'bw-'));
+function temporaryTables(folder) {
+  mkdirSync(`${folder}.tmp`, { recursive: true });
+  return `--tmpdir=${folder}.tmp`;
+}
 
 /** Makes an empty database in a folder that does not exist yet. */
 export async function installDatabase(folder) {
-  const temporary = ownFolder();
   const options = ['--auth-root-authentication-method=normal', '--skip-test-db', '--innodb-log-file-size=16M'];
-  const places = [`--datadir=${folder}`, `--tmpdir=${temporary}`];
-  try {
-    await promisify(execFile)(program('mariadb-install-db'), ['--no-defaults', ...asUser, ...places, ...options]);
-  } finally {
-    rmSync(temporary, { recursive: true, force: true });
-  }
+  await promisify(execFile)(program('mariadb-install-db'), [
+    '--no-defaults',
+    ...asUser,
+    `--datadir=${folder}`,
+    temporaryTables(folder),
+    ...options,
+  ]);
 }
 
 /** Resolves when a server greets at an address; MariaDB speaks first. */
@@ -85,12 +88,12 @@ export async function endLeftover(folder) {
  * apart from this process group, so that Ctrl+C reaches it only through `stop`.
  */
 export async function startDatabase({ folder, port, isThrowAway = false }) {
-  const own = ownFolder();
-  const socket = join(own, 's');
+  const socketFolder = mkdtempSync(join(tmpdir(), 'bw-'));
+  const socket = join(socketFolder, 's');
   const log = `${folder}.log`;
   const place = port ? ['--bind-address=127.0.0.1', `--port=${port}`] : ['--skip-networking'];
   const kept = [`--datadir=${folder}`, `--pid-file=${folder}.pid`, `--log-error=${log}`];
-  const files = [...kept, `--socket=${socket}`, `--tmpdir=${own}`];
+  const files = [...kept, `--socket=${socket}`, temporaryTables(folder)];
   const safety = isThrowAway ? throwAway : durable;
   const child = spawn(program('mariadbd'), ['--no-defaults', ...asUser, ...files, ...place, ...settings, ...safety], {
     detached: true,
@@ -99,7 +102,7 @@ export async function startDatabase({ folder, port, isThrowAway = false }) {
   child.on('error', () => undefined);
   const stop = async () => {
     if (child.exitCode === null && child.pid) await endProcess(child.pid);
-    rmSync(own, { recursive: true, force: true });
+    rmSync(socketFolder, { recursive: true, force: true });
   };
   if (!(await waitForGreeting(port ? { port, host: '127.0.0.1' } : { path: socket }, child))) {
     await stop();

@@ -38,7 +38,7 @@ async function makeDatabase(folder, secrets) {
   } finally {
     await server.stop();
   }
-  for (const ending of ['.pid', '.log']) rmSync(`${making}${ending}`, { force: true });
+  for (const ending of ['.pid', '.log', '.tmp']) rmSync(`${making}${ending}`, { recursive: true, force: true });
   renameSync(making, folder);
 }
 

@@ -13,7 +13,6 @@ import {
 import type { BenchDay } from '#shared/programme/bench-day-schema';
 import type { BenchTask } from '#shared/programme/bench-task';
 import type { BoardAnswer } from '#shared/programme/board-schema';
-import { addDays } from '#shared/calendar/add-days';
 import { dayOfInstant } from '#shared/calendar/day-of-instant';
 import { startOfDay_ms } from '#shared/programme/odd-days';
 import { programme as planAgain } from '#shared/programme/programme';
@@ -49,6 +48,7 @@ import {
   shopWith,
   solved,
   told,
+  wednesdayAfter,
 } from './sample-programme';
 import { workIdOf } from '#shared/programme/work-id-of';
 import { sampleEstimate } from './sample-estimate';
@@ -114,9 +114,7 @@ const signInAgain = async () => {
 /** The clock stands at a time of the wall on the coming Wednesday. */
 async function standAt(estimateId: string, minutes: number): Promise<void> {
   const { timeZone } = await programmeOf(api.ours, estimateId);
-  let day = dayOfInstant(api.clock.now().getTime(), timeZone);
-  do day = addDays(day, 1);
-  while (new Date(`${day}T12:00:00Z`).getUTCDay() !== 3);
+  const day = wednesdayAfter(dayOfInstant(api.clock.now().getTime(), timeZone));
   api.clock.stand(new Date(startOfDay_ms(day, timeZone) + minutes * 60_000 + 20_000));
   await signInAgain();
 }

@@ -1,5 +1,8 @@
 import { v7 as newId } from 'uuid';
 import type { Endpoint } from '#shared/actor/endpoint';
+import { addDays } from '#shared/calendar/add-days';
+import type { Day } from '#shared/calendar/day';
+import { weekdayOf } from '#shared/calendar/working-days';
 import { issueEstimate, markIssue } from '#shared/estimates/issues-endpoints';
 import { programme } from '#shared/programme/programme';
 import type { ProgrammeRequest } from '#shared/programme/programme-request';
@@ -38,6 +41,9 @@ export const shopOf = (mark: string, membershipId: string | null, more: Partial<
   ],
   ...more,
 });
+
+/** The next Wednesday after a day. */
+export const wednesdayAfter = (day: Day): Day => addDays(day, 7 - ((weekdayOf(day) + 4) % 7));
 
 /** Calls an endpoint and answers its body; whatever is refused fails the test that wanted it. */
 export async function told<Body>(visitor: Visitor, endpoint: Endpoint, parts: Parts = {}): Promise<Body> {

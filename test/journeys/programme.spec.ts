@@ -1,10 +1,9 @@
 import { v7 as newId } from 'uuid';
 import type { Change } from '#shared/estimates/change-schema';
 import { changeEstimate } from '#shared/estimates/estimates-endpoints';
-import { addDays } from '#shared/calendar/add-days';
 import { keepProgramme } from '#shared/programme/programme-endpoints';
 import { sampleEstimate, sampleMember, type SampleEstimate } from '../api/sample-estimate';
-import { markedIssue, programmeOf, shopWith } from '../api/sample-programme';
+import { markedIssue, programmeOf, shopWith, wednesdayAfter } from '../api/sample-programme';
 import { done } from './stage';
 import { violations } from './violations';
 import { Walk, type Person } from './walk';
@@ -35,9 +34,7 @@ async function threeBuildUps(): Promise<SampleEstimate> {
 /** It begins on the morning of a Wednesday to come: so its work falls on the same hours whenever this is run. */
 async function fromWednesday({ estimateId }: SampleEstimate): Promise<void> {
   const { inputs, version } = await programmeOf(walk.api.ours, estimateId);
-  let { day } = inputs;
-  do day = addDays(day, 1);
-  while (new Date(`${day}T12:00:00Z`).getUTCDay() !== 3);
+  const day = wednesdayAfter(inputs.day);
   await done(walk, keepProgramme, { params: { estimateId }, version, body: { ...inputs, day } });
 }
 
