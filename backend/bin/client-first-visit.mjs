@@ -62,7 +62,7 @@ export async function prepareFirstVisit(folder) {
   const main = fileOf(outputs, first);
   const output = await joined(folder, main, { manualChunks: (file) => pieces.get(file) });
   readdirSync(folder)
-    .filter((name) => name.endsWith('.js'))
+    .filter((name) => name.endsWith('.js') && !name.startsWith('worker-'))
     .forEach((name) => rmSync(join(folder, name)));
   output.forEach(({ fileName, code }) => writeFileSync(join(folder, fileName), code));
   const fileWith = (source) => output.find(({ moduleIds }) => moduleIds.includes(fileOf(outputs, source))).fileName;

@@ -8,6 +8,9 @@ describe('The policy for workers', () => {
     expect(ownWorkerAddress('https://workshop.example/worker-AB12CD34.js', origin)).toBe(
       'https://workshop.example/worker-AB12CD34.js',
     );
+    expect(ownWorkerAddress('/client-files/worker-AB12CD34.js', origin)).toBe(
+      'https://workshop.example/client-files/worker-AB12CD34.js',
+    );
   });
 
   it.each([

@@ -3,7 +3,7 @@ interface TrustedTypes {
   createPolicy(name: string, rules: { createScriptURL: (address: string) => string }): unknown;
 }
 
-const ownWorker = /^\/worker-[A-Za-z0-9]+\.js$/;
+const ownWorker = /^(\/client-files)?\/worker-[A-Za-z0-9]+\.js$/;
 
 /** The address as it stands if it is one of our own built workers, else a refusal. */
 export function ownWorkerAddress(address: string, origin: string): string {

@@ -1,0 +1,1 @@
+export const startFirstFormatWorker = (): Worker => new Worker(new URL('./first-format-worker', import.meta.url));
