@@ -167,6 +167,17 @@ describe('the estimate as a paper', () => {
     expect(untaxed).toContain('The deposit is recovered from each stage');
   });
 
+  it('shows the total alone, with the reason, where all lies outside the scope of tax', async () => {
+    const texts = ['standard', 'outside-scope'].map(async (taxCategoryId) =>
+      textOfPaper(await estimateOf(sampleSnapshot(smallDraft({ taxCategoryId })))),
+    );
+    const [taxed = '', outside = ''] = await Promise.all(texts);
+    expect(taxed).toMatch(/\bNet €[\d,.]+ .*\bTotal €/);
+    expect(outside).not.toMatch(/\bNet €/);
+    expect(outside).not.toContain('€0.00');
+    expect(outside).toMatch(/\bTotal €[\d,.]+ Not subject to VAT|\bTotal Not subject to VAT €/);
+  });
+
   it.each(['members', 'kinds'] as const)('comes by %s to sections that sum to the lines', async (presentation) => {
     const snapshot = sampleSnapshot(smallDraft({ presentation }));
     const { lines, subtotal_minor } = snapshot.figures.price;

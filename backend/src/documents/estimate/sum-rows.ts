@@ -1,4 +1,5 @@
 import type { PriceTax } from '#shared/estimates/price/price';
+import { isOutsideTax } from '#shared/money/is-outside-tax';
 import { textStyles, type TextStyle } from '../paper/paper-colours';
 import type { TableRow } from '../paper/table-block';
 import type { IssueContent } from './issue-content';
@@ -21,8 +22,13 @@ const sumRow = ({ text, note, amount, style = textStyles.body, above = 'none' }:
   keepsWithNext: true,
 });
 
-function taxSum({ snapshot, words }: IssueContent, { taxCategoryId, tax, net_minor, tax_minor }: PriceTax): Sum {
-  const category = snapshot.card.money.taxCategories.find((one) => one.id === taxCategoryId);
+const categoryOf = ({ snapshot }: IssueContent, { taxCategoryId }: PriceTax) =>
+  snapshot.card.money.taxCategories.find(({ id }) => id === taxCategoryId);
+
+function taxSum(content: IssueContent, priced: PriceTax): Sum {
+  const { words } = content;
+  const { tax, net_minor, tax_minor } = priced;
+  const category = categoryOf(content, priced);
   const name = category?.name ?? tax.code;
   const isTaxed = Number(tax.percent) > 0;
   const values = { name, rate_percent: Number(tax.percent), net_minor };
@@ -47,23 +53,33 @@ function discountSums({ snapshot, draft, words }: IssueContent): Sum[] {
   ];
 }
 
-/** The sums under the lines, all on one page: what is taken off, net, tax of each category, and the total. */
-export function sumRows(content: IssueContent): TableRow[] {
+/** The total, with the reason beside it where nothing is taxed at all. */
+function totalSum(content: IssueContent, untaxed: readonly PriceTax[]): Sum {
   const { words, snapshot } = content;
-  const { net_minor, taxes, gross_minor } = snapshot.figures.price;
-  const discounts = discountSums(content);
-  const net: Sum = {
-    text: words.say('paper-net'),
-    amount: words.money(net_minor),
-    style: textStyles.strong,
-    above: discounts.length > 0 ? 'hair' : 'strong',
-  };
-  const total: Sum = {
+  const reasons = untaxed.map((tax) => categoryOf(content, tax)?.exemptionReason ?? '');
+  return {
     text: words.say('paper-total'),
-    amount: words.money(gross_minor),
+    note: [...new Set(reasons)].filter((reason) => reason !== '').join('; '),
+    amount: words.money(snapshot.figures.price.gross_minor),
     style: textStyles.sum,
     above: 'gold',
   };
-  const rows = [...discounts, net, ...taxes.map((tax) => taxSum(content, tax)), total].map(sumRow);
+}
+
+/** What is taxed, and the tax of each category. */
+function taxSums(content: IssueContent, above: TableRow['above']): Sum[] {
+  const { words, snapshot } = content;
+  const { net_minor, taxes } = snapshot.figures.price;
+  const net: Sum = { text: words.say('paper-net'), amount: words.money(net_minor), style: textStyles.strong, above };
+  return [net, ...taxes.map((tax) => taxSum(content, tax))];
+}
+
+/** The sums under the lines, all on one page: what is taken off, net and tax of each category where there may be tax, and the total. */
+export function sumRows(content: IssueContent): TableRow[] {
+  const { taxes } = content.snapshot.figures.price;
+  const isOutside = isOutsideTax(taxes.map(({ tax }) => tax));
+  const discounts = discountSums(content);
+  const taxed = isOutside ? [] : taxSums(content, discounts.length > 0 ? 'hair' : 'strong');
+  const rows = [...discounts, ...taxed, totalSum(content, isOutside ? taxes : [])].map(sumRow);
   return rows.map((row, place) => ({ ...row, keepsWithNext: place < rows.length - 1 }));
 }

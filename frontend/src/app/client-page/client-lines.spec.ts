@@ -48,6 +48,19 @@ describe('ClientLines', () => {
     ]);
   });
 
+  it('shows the total alone, and why, where nothing is taxed', async () => {
+    const outside = {
+      ...{ name: 'Outside', code: 'O' as const, percent: '0', exemptionReason: 'Not subject to tax here.' },
+      ...{ net_minor: 5_000_00, tax_minor: 0 },
+    };
+    const widget = await open('members', { discount_minor: 250_00, taxes: [outside] });
+    expect([...widget.element.querySelectorAll('dl > div')].map(spoken)).toEqual([
+      expect.stringMatching(/^Discount ?[-−]€250.00$/),
+      expect.stringMatching(/^Total ?€6,150.00$/),
+    ]);
+    expect(spoken(widget.element.querySelector('dl + .note') as Element)).toBe('Not subject to tax here.');
+  });
+
   it('says by what measured work is paid, and nothing of what one of it costs', async () => {
     const [line] = clientPrice(6_150_00).lines;
     if (!line) throw new Error('the sample lost its lines');

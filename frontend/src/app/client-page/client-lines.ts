@@ -3,6 +3,7 @@ import type { ClientIssue } from '#shared/client-page/client-issue-schema';
 import type { ClientPrice } from '#shared/client-page/client-price-schema';
 import { measuredNote } from '#shared/documents/measured-note';
 import { sectionsByKind, sectionsByMember } from '#shared/estimates/price/price-sections';
+import { isOutsideTax } from '#shared/money/is-outside-tax';
 import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
 
@@ -39,6 +40,12 @@ export class ClientLines {
   );
   protected readonly rows = computed(() => (this.issue().presentation === 'members' ? this.byMember() : this.byKind()));
   protected readonly sums = computed(() => this.sumsOf(this.price()));
+  /** Why nothing is taxed, where nothing is: then the total stands alone. */
+  protected readonly untaxed = computed(() => {
+    const { taxes } = this.price();
+    const reasons = isOutsideTax(taxes) ? taxes.map(({ exemptionReason }) => exemptionReason) : [];
+    return [...new Set(reasons)].filter((reason) => reason !== '').join('; ');
+  });
   protected readonly total = computed(() => this.formats.money(this.price().gross_minor));
 
   private byMember(): Row[] {
@@ -90,8 +97,10 @@ export class ClientLines {
   private sumsOf(price: ClientPrice): { name: string; amount: string }[] {
     const written = (amount_minor: number) => this.formats.money(amount_minor);
     const discount = { name: this.words.say('paper-discount'), amount: written(-price.discount_minor) };
+    const discounts = price.discount_minor === 0 ? [] : [discount];
+    if (isOutsideTax(price.taxes)) return discounts;
     return [
-      ...(price.discount_minor === 0 ? [] : [discount]),
+      ...discounts,
       { name: this.words.say('paper-net'), amount: written(price.net_minor) },
       ...price.taxes.map((tax) => ({ name: this.taxName(tax), amount: written(tax.tax_minor) })),
     ];

@@ -3,6 +3,7 @@ import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { acceptIssue, readClientPaper, reviewClientChoice } from '#shared/client-page/client-issues-endpoints';
 import type { ClientIssue } from '#shared/client-page/client-issue-schema';
+import { isOutsideTax } from '#shared/money/is-outside-tax';
 import { Api } from '../core/api/api';
 import { addressOf } from '../core/api/address-of';
 import { schemaForm } from '../core/forms/schema-form';
@@ -55,6 +56,7 @@ export class ClientReview {
     const gross_minor = this.review()?.price.gross_minor ?? 0;
     return gross_minor < 0 ? this.words.say('paper-takes-away', { amount: this.formats.money(-gross_minor) }) : '';
   });
+  protected readonly isTaxed = computed(() => !isOutsideTax(this.review()?.price.taxes ?? []));
   protected readonly firstPayment = computed(() => this.review()?.price.payments[0]?.paid_minor);
   protected readonly paper = computed(() => {
     const chosen = this.issueChosen();

@@ -1,0 +1,5 @@
+import type { TaxRate } from './tax-by-category';
+
+/** Whether all of a price lies outside the scope of tax (EN 16931 category O), so that net and total are one sum; not where nothing is priced. */
+export const isOutsideTax = (taxes: readonly Pick<TaxRate, 'code'>[]): boolean =>
+  taxes.length > 0 && taxes.every(({ code }) => code === 'O');
