@@ -49,20 +49,28 @@ const areaIn =
   (size: number, digits: number): string =>
     worded(code, size, Number(size.toFixed(digits)) === 0 ? 0 : { exactly: digits });
 
+/** Whether a size is still below a limit once it is written, since 99.996 with two decimals is 100.00, and 100 takes none. */
+const staysBelow = (limit: number, size: number, digits: number): boolean =>
+  new D(size).abs().toDecimalPlaces(digits).lt(limit);
+
 const metricArea = (pen: Pen): Write => {
   const [small, large] = [areaIn(pen, 'unit-square-centimetres'), areaIn(pen, 'unit-square-metres')];
-  return (area_mm2) =>
-    Math.abs(area_mm2) < 1e6
-      ? small(inMetric(area_mm2, 'mm2', 'cm2'), Math.abs(area_mm2) < 1e4 ? 2 : 0)
-      : large(inMetric(area_mm2, 'mm2', 'm2'), 2);
+  return (area_mm2) => {
+    const area_cm2 = inMetric(area_mm2, 'mm2', 'cm2');
+    if (staysBelow(100, area_cm2, 2)) return small(area_cm2, 2);
+    return staysBelow(10_000, area_cm2, 0) ? small(area_cm2, 0) : large(inMetric(area_mm2, 'mm2', 'm2'), 2);
+  };
 };
 
 const imperialArea = (pen: Pen): Write => {
   const [small, large] = [areaIn(pen, 'unit-square-inches'), areaIn(pen, 'unit-square-feet')];
-  return (area_mm2) =>
-    Math.abs(area_mm2) < squareMillimetresPerSquareFoot
-      ? small(area_mm2 / squareMillimetresPerSquareInch, 1)
+  const inchesPerFoot = squareMillimetresPerSquareFoot / squareMillimetresPerSquareInch;
+  return (area_mm2) => {
+    const area_in2 = area_mm2 / squareMillimetresPerSquareInch;
+    return staysBelow(inchesPerFoot, area_in2, 1)
+      ? small(area_in2, 1)
       : large(area_mm2 / squareMillimetresPerSquareFoot, 2);
+  };
 };
 
 function lengthWriter({ settings: { lengthUnit, locale }, withUnit }: Pen): Write {

@@ -63,6 +63,21 @@ describe('What a page shows can be typed again', () => {
     );
   });
 
+  it.each([
+    ['mm', 9_999.49, '99.99 cm²'],
+    ['mm', 9_999.6, '100 cm²'],
+    ['mm', -9_999.6, '−100 cm²'],
+    ['mm', 999_949, '9,999 cm²'],
+    ['mm', 999_950, '1.00 m²'],
+    ['in', 143.94 * 645.16, '143.9 in²'],
+    ['in', 143.96 * 645.16, '1.00 ft²'],
+  ] as const)(
+    'in %s an area of %d mm² is written %s, where it is rounded over the limit of its unit',
+    (unit, area_mm2, text) => {
+      expect(shown('en-GB', unit).write('mm2', area_mm2).replace(/\s/g, ' ')).toBe(text);
+    },
+  );
+
   it('a length is the same to the last figure shown', () => {
     fc.assert(
       fc.property(fc.double({ min: 0, max: 99_999, noNaN: true }), locales, units, (length_mm, locale, unit) => {
