@@ -3,7 +3,7 @@ import { clientPrice, ClientVisit, offered } from '../../test/client-issue';
 const sha256 = 'ab'.repeat(32);
 const refused = (status: number, title: string) => ({ type: 'about:blank', title, status, instance: '', errors: [] });
 
-async function reviewing(): Promise<ClientVisit> {
+async function reviewing(more: Parameters<typeof clientPrice>[1] = {}): Promise<ClientVisit> {
   const visit = await ClientVisit.begin();
   await visit.choose('Oil gilding');
   visit.asked('prices').flush(clientPrice(5_535_00, { choice: [offered.oil] }));
@@ -11,7 +11,7 @@ async function reviewing(): Promise<ClientVisit> {
   await visit.press('Review');
   const request = visit.asked('review');
   expect(request.request.body).toEqual({ choice: [offered.oil] });
-  request.flush({ price: clientPrice(5_535_00, { choice: [offered.oil] }), pdfSha256: sha256 });
+  request.flush({ price: clientPrice(5_535_00, { ...more, choice: [offered.oil] }), pdfSha256: sha256 });
   await visit.settle();
   return visit;
 }
@@ -25,6 +25,21 @@ describe('The last look before accepting', () => {
       expect(visit.text).toContain(text);
     expect(visit.element.querySelector('.bar')).toBeNull();
     expect(visit.element.ownerDocument.activeElement?.textContent).toBe('Before you accept');
+  });
+
+  const namesOf = ({ element }: ClientVisit) =>
+    [...element.querySelectorAll('app-client-review dt')].map(({ textContent }) => textContent?.trim());
+
+  it('tells net and tax where there may be tax', async () => {
+    expect(namesOf(await reviewing()).slice(-3)).toEqual(['Net', 'Tax', 'Total']);
+  });
+
+  it('tells the total alone where nothing is taxed', async () => {
+    const taxes = clientPrice(5_535_00).taxes.map((tax) => ({ ...tax, code: 'O' as const, percent: '0' }));
+    const names = namesOf(await reviewing({ taxes }));
+    expect(names).toContain('Total');
+    expect(names).not.toContain('Net');
+    expect(names).not.toContain('Tax');
   });
 
   it('sends nothing without a name and a tick, and says what is missing', async () => {
