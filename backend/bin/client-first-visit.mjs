@@ -1,4 +1,4 @@
-import { readFileSync, readdirSync, rmSync, writeFileSync } from 'node:fs';
+import { readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { joined } from './join-chunks.mjs';
 
@@ -61,10 +61,6 @@ export async function prepareFirstVisit(folder) {
   const pieces = piecesOf(outputs);
   const main = fileOf(outputs, first);
   const output = await joined(folder, main, { manualChunks: (file) => pieces.get(file) });
-  readdirSync(folder)
-    .filter((name) => name.endsWith('.js') && !name.startsWith('worker-'))
-    .forEach((name) => rmSync(join(folder, name)));
-  output.forEach(({ fileName, code }) => writeFileSync(join(folder, fileName), code));
   const fileWith = (source) => output.find(({ moduleIds }) => moduleIds.includes(fileOf(outputs, source))).fileName;
   const html = readFileSync(page, 'utf8')
     .replace(/<link rel="modulepreload"[^>]*>/g, '')

@@ -16,13 +16,11 @@ export async function joinChunks(folder) {
   const [main] = /main-\w+\.js/.exec(html) ?? [];
   if (!main) throw new Error('The built page names no file it begins with.');
   const output = await joined(folder, main);
-  output.flatMap(({ moduleIds }) => moduleIds).forEach((name) => rmSync(join(folder, name)));
-  output.forEach(({ fileName, code }) => writeFileSync(join(folder, fileName), code));
   writeFileSync(page, pageWith(html, main, [output, JSON.parse(readFileSync(stats, 'utf8')).outputs]));
   rmSync(stats);
 }
 
-/** The files put together anew from the one they begin with; what is no part of them (workers) stays beside them as it was. */
+/** Puts files together anew from the one they begin with, in place of what they are made of; what is no part of them (workers) stays beside them as it was. */
 export async function joined(folder, main, options = {}) {
   const texts = new Map(
     readdirSync(folder)
@@ -35,6 +33,8 @@ export async function joined(folder, main, options = {}) {
     ...{ entryFileNames: 'main-[hash].js', chunkFileNames: 'chunk-[hash].js', ...options },
   });
   await bundle.close();
+  output.flatMap(({ moduleIds }) => moduleIds).forEach((name) => rmSync(join(folder, name)));
+  output.forEach(({ fileName, code }) => writeFileSync(join(folder, fileName), code));
   return output;
 }
 

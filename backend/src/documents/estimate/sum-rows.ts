@@ -1,5 +1,5 @@
 import type { PriceTax } from '#shared/estimates/price/price';
-import { isOutsideTax } from '#shared/money/is-outside-tax';
+import { isOutsideTax, reasonOutsideTax } from '#shared/money/is-outside-tax';
 import { textStyles, type TextStyle } from '../paper/paper-colours';
 import type { TableRow } from '../paper/table-block';
 import type { IssueContent } from './issue-content';
@@ -54,13 +54,17 @@ function discountSums({ snapshot, draft, words }: IssueContent): Sum[] {
 }
 
 /** The total, with the reason beside it where nothing is taxed at all. */
-function totalSum(content: IssueContent, untaxed: readonly PriceTax[]): Sum {
+function totalSum(content: IssueContent): Sum {
   const { words, snapshot } = content;
-  const reasons = untaxed.map((tax) => categoryOf(content, tax)?.exemptionReason ?? '');
+  const { taxes, gross_minor } = snapshot.figures.price;
+  const explained = taxes.map((priced) => ({
+    code: priced.tax.code,
+    exemptionReason: categoryOf(content, priced)?.exemptionReason ?? '',
+  }));
   return {
     text: words.say('paper-total'),
-    note: [...new Set(reasons)].filter((reason) => reason !== '').join('; '),
-    amount: words.money(snapshot.figures.price.gross_minor),
+    note: reasonOutsideTax(explained),
+    amount: words.money(gross_minor),
     style: textStyles.sum,
     above: 'gold',
   };
@@ -77,9 +81,9 @@ function taxSums(content: IssueContent, above: TableRow['above']): Sum[] {
 /** The sums under the lines, all on one page: what is taken off, net and tax of each category where there may be tax, and the total. */
 export function sumRows(content: IssueContent): TableRow[] {
   const { taxes } = content.snapshot.figures.price;
-  const isOutside = isOutsideTax(taxes.map(({ tax }) => tax));
   const discounts = discountSums(content);
+  const isOutside = isOutsideTax(taxes.map(({ tax }) => tax));
   const taxed = isOutside ? [] : taxSums(content, discounts.length > 0 ? 'hair' : 'strong');
-  const rows = [...discounts, ...taxed, totalSum(content, isOutside ? taxes : [])].map(sumRow);
+  const rows = [...discounts, ...taxed, totalSum(content)].map(sumRow);
   return rows.map((row, place) => ({ ...row, keepsWithNext: place < rows.length - 1 }));
 }

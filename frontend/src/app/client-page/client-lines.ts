@@ -3,7 +3,7 @@ import type { ClientIssue } from '#shared/client-page/client-issue-schema';
 import type { ClientPrice } from '#shared/client-page/client-price-schema';
 import { measuredNote } from '#shared/documents/measured-note';
 import { sectionsByKind, sectionsByMember } from '#shared/estimates/price/price-sections';
-import { isOutsideTax } from '#shared/money/is-outside-tax';
+import { isOutsideTax, reasonOutsideTax } from '#shared/money/is-outside-tax';
 import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
 
@@ -41,11 +41,7 @@ export class ClientLines {
   protected readonly rows = computed(() => (this.issue().presentation === 'members' ? this.byMember() : this.byKind()));
   protected readonly sums = computed(() => this.sumsOf(this.price()));
   /** Why nothing is taxed, where nothing is: then the total stands alone. */
-  protected readonly untaxed = computed(() => {
-    const { taxes } = this.price();
-    const reasons = isOutsideTax(taxes) ? taxes.map(({ exemptionReason }) => exemptionReason) : [];
-    return [...new Set(reasons)].filter((reason) => reason !== '').join('; ');
-  });
+  protected readonly untaxed = computed(() => reasonOutsideTax(this.price().taxes));
   protected readonly total = computed(() => this.formats.money(this.price().gross_minor));
 
   private byMember(): Row[] {

@@ -56,7 +56,7 @@ export class ClientReview {
     const gross_minor = this.review()?.price.gross_minor ?? 0;
     return gross_minor < 0 ? this.words.say('paper-takes-away', { amount: this.formats.money(-gross_minor) }) : '';
   });
-  protected readonly isTaxed = computed(() => !isOutsideTax(this.review()?.price.taxes ?? []));
+  protected readonly mayBeTaxed = computed(() => !isOutsideTax(this.review()?.price.taxes ?? []));
   protected readonly firstPayment = computed(() => this.review()?.price.payments[0]?.paid_minor);
   protected readonly paper = computed(() => {
     const chosen = this.issueChosen();
