@@ -12,8 +12,6 @@ const later = [
   'frontend/src/app/client-app.ts',
   'shared/words/say.ts',
   'frontend/src/app/core/formats/formats.ts',
-  'shared/measure/shape-schema.ts',
-  'shared/client-page/client-issues-endpoints.ts',
   'frontend/src/app/client-bootstrap.ts',
   'frontend/src/app/client-page/client-issue-rest.ts',
   'frontend/src/app/client-page/later-parts.ts',
@@ -39,6 +37,16 @@ function piecesOf(outputs) {
   return pieces;
 }
 
+/** Fails where a piece that comes before the forms brings the schemas along: they would hold up a phone for nothing. */
+function refuseEarlySchemas(outputs, pieces) {
+  const forms = later.at(-1);
+  const isSchemas = (input) => input.includes('node_modules/zod/');
+  const early = [...pieces].find(
+    ([file, piece]) => piece !== forms && Object.keys(outputs[file].inputs).some(isSchemas),
+  );
+  if (early) throw new Error(`The schemas came to the pages of clients before their forms, with ${early[1]}.`);
+}
+
 const linksTo = (files) => files.map((file) => `<link rel="modulepreload" href="/client-files/${file}">`).join('');
 
 /** Has the page bring its styles, and name the files of the application, so that `client.ts` has them fetched when their time has come. */
@@ -59,6 +67,7 @@ export async function prepareFirstVisit(folder) {
   const [page, stats] = [join(folder, 'index.html'), join(folder, 'stats.json')];
   const { outputs } = JSON.parse(readFileSync(stats, 'utf8'));
   const pieces = piecesOf(outputs);
+  refuseEarlySchemas(outputs, pieces);
   const main = fileOf(outputs, first);
   const output = await joined(folder, main, { manualChunks: (file) => pieces.get(file) });
   const fileWith = (source) => output.find(({ moduleIds }) => moduleIds.includes(fileOf(outputs, source))).fileName;

@@ -1,12 +1,11 @@
 import { loadTranslations } from '@angular/localize';
-import { config } from 'zod/v4/core';
+import { forbidMadeFunctions } from './app/core/forbid-made-functions';
 import { admitOwnWorkers } from './app/core/workers/admit-own-workers';
 import { languageFor, languages } from './words/languages';
 
 /** The words come first: texts marked for translation are read as soon as the application's files are. */
 async function start(): Promise<void> {
-  // zod would otherwise try to make functions out of text, which the page's policy forbids.
-  config({ jitless: true });
+  forbidMadeFunctions();
   admitOwnWorkers();
   const language = languageFor(navigator.languages);
   const [catalogue, templates] = await Promise.all([

@@ -1,6 +1,6 @@
 import '@angular/localize/init';
 import { loadTranslations } from '@angular/localize';
-import { config } from 'zod/v4/core';
+import { forbidMadeFunctions } from './app/core/forbid-made-functions';
 import { nextTask } from './app/core/next-task';
 import { languageFor, languages } from './words/languages';
 
@@ -9,15 +9,12 @@ const pieces: readonly (() => Promise<unknown>)[] = [
   () => import('./app/client-app'),
   () => import('#shared/words/say'),
   () => import('./app/core/formats/formats'),
-  () => import('#shared/measure/shape-schema'),
-  () => import('#shared/client-page/client-issues-endpoints'),
   () => import('./app/client-bootstrap'),
 ];
 
 /** Starts the pages of clients; the words come first, as in `main.ts`. */
 export async function startClient(): Promise<void> {
-  // zod would otherwise try to make functions out of text, which the page's policy forbids.
-  config({ jitless: true });
+  forbidMadeFunctions();
   const language = languageFor(navigator.languages);
   const [catalogue, templates] = await Promise.all([
     languages[language].catalogue(),

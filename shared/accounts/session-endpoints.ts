@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { readSessionCall } from '#shared/accounts/session-call';
 import { ownSessionSchema, sessionSchema, signInSchema } from '#shared/accounts/session-schema';
 import { endpoint } from '#shared/actor/endpoint';
 import { identifier } from '#shared/problems/entry-schema';
@@ -6,14 +7,7 @@ import { identifier } from '#shared/problems/entry-schema';
 /** The same for everybody: a session says nothing of the workshop's money. */
 const session = { public: sessionSchema } as const;
 
-export const readSession = endpoint({
-  name: 'readSession',
-  summary: 'Who is signed in, and the token that changing requests must carry.',
-  method: 'get',
-  path: '/api/session',
-  callers: 'anyone',
-  answers: session,
-});
+export const readSession = endpoint({ ...readSessionCall, answers: session });
 
 export const signIn = endpoint({
   name: 'signIn',

@@ -37,6 +37,17 @@ export interface Endpoint {
   readonly inSteps?: boolean;
 }
 
+type Schemas = 'params' | 'query' | 'body' | 'answers';
+
+/**
+ * An endpoint without its schemas, for a page that must be there at once: the server has checked the answer by the endpoint itself, and what
+ * it sends is taken at its word.
+ */
+export type BareEndpoint<E extends Endpoint = Endpoint> = Omit<E, Schemas> & { readonly bareOf?: E };
+
+/** Declares what is left of an endpoint when its schemas stay away, keeping the types of its parts and its answer. */
+export const bareEndpoint = <E extends Endpoint>(value: Omit<E, Schemas>): BareEndpoint<E> => value;
+
 /** Declares an endpoint, keeping the exact types of its parts. */
 export const endpoint = <const E extends Endpoint>(value: E): E => value;
 

@@ -5,50 +5,32 @@ import { endpoint } from '#shared/actor/endpoint';
 import { clientDecisionSchema, clientIssueSchema } from '#shared/client-page/client-issue-schema';
 import { clientOverviewSchema } from '#shared/client-page/client-overview-schema';
 import { clientPriceSchema, clientReviewSchema } from '#shared/client-page/client-price-schema';
+import { firstCalls } from '#shared/client-page/first-calls';
 import { identifier, line, paragraphs } from '#shared/problems/entry-schema';
 
 const oneIssue = z.strictObject({ issueId: identifier });
 const choosing = z.strictObject({ choice: choiceSchema });
 
 export const readClientOverview = endpoint({
-  name: 'readClientOverview',
-  summary: 'The jobs a client may see, with their issues and where these stand, and what is owed',
-  method: 'get',
-  path: '/api/client/overview',
-  callers: 'client',
+  ...firstCalls.readClientOverview,
   answers: { public: clientOverviewSchema },
 });
 
 export const readClientLogo = endpoint({
-  name: 'readClientLogo',
-  summary: 'The picture of the workshop’s letterhead',
-  method: 'get',
-  path: '/api/client/logo',
-  callers: 'client',
-  media: 'image/png',
+  ...firstCalls.readClientLogo,
   answers: { public: z.unknown() },
 });
 
 export const readClientIssue = endpoint({
-  name: 'readClientIssue',
-  summary: 'An issue as its client reads it, with all that was asked about the job',
-  method: 'get',
-  path: '/api/client/issues/:issueId',
-  callers: 'client',
+  ...firstCalls.readClientIssue,
   params: oneIssue,
-  atOnce: 2,
   answers: { public: clientIssueSchema },
 });
 
 export const priceClientChoice = endpoint({
-  name: 'priceClientChoice',
-  summary: 'What an issue comes to with these alternatives',
-  method: 'post',
-  path: '/api/client/issues/:issueId/prices',
-  callers: 'client',
+  ...firstCalls.priceClientChoice,
   params: oneIssue,
   body: choosing,
-  atOnce: 4,
   answers: { public: clientPriceSchema },
 });
 
@@ -66,16 +48,9 @@ export const reviewClientChoice = endpoint({
 });
 
 export const readClientPaper = endpoint({
-  name: 'readClientPaper',
-  summary:
-    'The paper of an issue with these alternatives (their ids, commas between); of one that was accepted, the very paper accepted',
-  method: 'get',
-  path: '/api/client/issues/:issueId/estimate.pdf',
-  callers: 'client',
+  ...firstCalls.readClientPaper,
   params: oneIssue,
   query: z.strictObject({ choice: z.string().max(1000).default('') }),
-  media: 'application/pdf',
-  atOnce: 4,
   answers: { public: z.unknown() },
 });
 

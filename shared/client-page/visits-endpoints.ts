@@ -2,17 +2,12 @@ import * as z from 'zod';
 import { endpoint } from '#shared/actor/endpoint';
 import { clientIssueSchema } from '#shared/client-page/client-issue-schema';
 import { clientOverviewSchema } from '#shared/client-page/client-overview-schema';
+import { firstCalls } from '#shared/client-page/first-calls';
 import { emailAddress } from '#shared/problems/entry-schema';
 
 export const beginClientVisit = endpoint({
-  name: 'beginClientVisit',
-  summary:
-    'Begin a visit with the secret of a mailed link; the answer holds the token that changing requests must carry, what there is to read, and the issue that is read first',
-  method: 'post',
-  path: '/api/client/visits',
-  callers: 'anyone',
+  ...firstCalls.beginClientVisit,
   body: z.strictObject({ token: z.string().min(1).max(200) }),
-  atOnce: 4,
   answers: {
     public: z.strictObject({
       token: z.string(),

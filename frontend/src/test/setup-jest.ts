@@ -1,9 +1,9 @@
 import '@angular/localize/init';
 import { setupZonelessTestEnv } from 'jest-preset-angular/setup-env/zoneless';
-import * as z from 'zod';
+import { forbidMadeFunctions } from '../app/core/forbid-made-functions';
 
 setupZonelessTestEnv({ errorOnUnknownElements: true, errorOnUnknownProperties: true });
-z.config({ jitless: true });
+forbidMadeFunctions();
 
 /** jsdom lays nothing out, so nothing ever changes its size. */
 class StillObserver implements ResizeObserver {

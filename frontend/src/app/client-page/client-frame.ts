@@ -7,8 +7,8 @@ import {
   inject,
   input,
 } from '@angular/core';
-import { readClientLogo } from '#shared/client-page/client-issues-endpoints';
 import type { ClientLetterhead } from '#shared/client-page/client-letterhead-schema';
+import { firstCalls } from '#shared/client-page/first-calls';
 import { addressOf } from '../core/api/address-of';
 import { uncover } from './opening-head';
 
@@ -107,7 +107,7 @@ export class ClientFrame {
 
   readonly letterhead = input<ClientLetterhead>();
 
-  protected readonly logo = addressOf(readClientLogo);
+  protected readonly logo = addressOf(firstCalls.readClientLogo);
   protected readonly address = computed(() =>
     (this.letterhead()?.addressLines ?? []).filter((line) => line !== this.letterhead()?.name).join(', '),
   );

@@ -14,7 +14,7 @@ import {
   viewChild,
 } from '@angular/core';
 import { RouterLink } from '@angular/router';
-import { readClientPaper } from '#shared/client-page/client-issues-endpoints';
+import { firstCalls } from '#shared/client-page/first-calls';
 import { addressOf } from '../core/api/address-of';
 import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
@@ -62,7 +62,7 @@ export class ClientIssuePage {
   /** Reading it, looking at it for the last time, or declining it. */
   protected readonly step = signal<'reading' | 'reviewing' | 'declining'>('reading');
   protected readonly paper = computed(() =>
-    addressOf(readClientPaper, {
+    addressOf(firstCalls.readClientPaper, {
       params: { issueId: this.issueId() },
       query: { choice: this.store.choice().join(',') },
     }),

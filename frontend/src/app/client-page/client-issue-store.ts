@@ -1,8 +1,8 @@
 import { Injectable, computed, inject, linkedSignal, resource, signal } from '@angular/core';
-import { priceClientChoice, readClientIssue } from '#shared/client-page/client-issues-endpoints';
 import type { ClientDecision, ClientIssue } from '#shared/client-page/client-issue-schema';
 import type { Question } from '#shared/agreements/question-schema';
 import { Api } from '../core/api/api';
+import { openingCalls } from './opening-calls';
 
 /** How many parts of an issue come one after the other below its head: of its pieces one member and those after it, the choices, and so on. */
 export const partsOfIssue = 7;
@@ -16,7 +16,7 @@ export class ClientIssueStore {
   private readonly reading = resource({
     params: () => this.issueId(),
     loader: ({ params, abortSignal }) =>
-      this.api.call(readClientIssue, { params: { issueId: params }, signal: abortSignal }),
+      this.api.call(openingCalls.readIssue, { params: { issueId: params }, signal: abortSignal }),
   });
   readonly issue = computed(() => (this.reading.hasValue() ? this.reading.value() : undefined));
   readonly problem = computed(() => this.reading.error()?.message ?? '');
@@ -44,7 +44,7 @@ export class ClientIssueStore {
       return issue && this.choice().length > 0 ? { issueId: issue.issue.id, choice: [...this.choice()] } : undefined;
     },
     loader: ({ params: { issueId, choice }, abortSignal }) =>
-      this.api.call(priceClientChoice, { params: { issueId }, body: { choice }, signal: abortSignal }),
+      this.api.call(openingCalls.priceChoice, { params: { issueId }, body: { choice }, signal: abortSignal }),
   });
   readonly isPricing = computed(() => this.choice().length > 0 && this.pricing.isLoading());
   readonly pricingProblem = computed(() => this.pricing.error()?.message ?? '');

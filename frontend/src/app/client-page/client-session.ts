@@ -1,10 +1,10 @@
 import { Injectable, inject } from '@angular/core';
-import { readSession } from '#shared/accounts/session-endpoints';
 import { Api } from '../core/api/api';
 import { Notices } from '../core/problems/notices';
 import { ProblemError } from '../core/problems/problem-error';
 import { Session } from '../core/session/session';
 import type { SessionPort } from '../core/session/session-port';
+import { openingCalls } from './opening-calls';
 
 /** The session of a visit: it has a token for what changes something, and nobody who is signed in. */
 @Injectable({ providedIn: 'root' })
@@ -15,7 +15,7 @@ export class ClientSession implements SessionPort {
 
   async read(): Promise<void> {
     try {
-      const { token } = await this.api.call(readSession, {});
+      const { token } = await this.api.call(openingCalls.readSession, {});
       this.session.put(undefined, token);
     } catch (error) {
       if (!(error instanceof ProblemError)) throw error;

@@ -1,5 +1,5 @@
 import { HttpHeaders, HttpRequest } from '@angular/common/http';
-import type { Endpoint } from '#shared/actor/endpoint';
+import type { BareEndpoint } from '#shared/actor/endpoint';
 import { addressOf } from './address-of';
 import type { AnyParts } from './call-parts';
 
@@ -12,7 +12,7 @@ const headerNames = {
 } as const;
 
 /** The session's token where something changes, the version seen, the key of a thing done once. */
-function headersOf(endpoint: Endpoint, parts: AnyParts, token: string): Record<string, string> {
+function headersOf(endpoint: BareEndpoint, parts: AnyParts, token: string): Record<string, string> {
   return {
     ...(endpoint.method === 'get' ? {} : { [headerNames.token]: token }),
     ...(parts.version === undefined ? {} : { [headerNames.version]: `"${parts.version}"` }),
@@ -22,7 +22,7 @@ function headersOf(endpoint: Endpoint, parts: AnyParts, token: string): Record<s
 }
 
 /** JSON as it is, or a form with the file and the plain fields beside it. */
-function bodyOf(endpoint: Endpoint, { body, file }: AnyParts): unknown {
+function bodyOf(endpoint: BareEndpoint, { body, file }: AnyParts): unknown {
   if (!endpoint.upload || !file) return body ?? null;
   const form = new FormData();
   for (const [name, value] of Object.entries((body ?? {}) as Record<string, string | number>))
@@ -32,7 +32,7 @@ function bodyOf(endpoint: Endpoint, { body, file }: AnyParts): unknown {
 }
 
 /** One call of an endpoint as the request that is sent. */
-export function callRequest(endpoint: Endpoint, parts: AnyParts, token: string): HttpRequest<unknown> {
+export function callRequest(endpoint: BareEndpoint, parts: AnyParts, token: string): HttpRequest<unknown> {
   return new HttpRequest<unknown>(endpoint.method.toUpperCase(), addressOf(endpoint, parts), bodyOf(endpoint, parts), {
     headers: new HttpHeaders(headersOf(endpoint, parts, token)),
     responseType: endpoint.media ? 'blob' : 'json',

@@ -1,5 +1,5 @@
 import { HttpErrorResponse } from '@angular/common/http';
-import { problemSchema, type Problem } from '#shared/problems/problem-schema';
+import type { Problem } from '#shared/problems/problem-schema';
 import { ProblemError } from '../problems/problem-error';
 
 const plain = (status: number, title: string): Problem => ({
@@ -21,15 +21,19 @@ async function contentOf(error: HttpErrorResponse): Promise<unknown> {
   }
 }
 
+/** A problem as the server describes it; its schema is fetched when there is one, since a first page has none. */
+async function describedIn(content: unknown): Promise<Problem | undefined> {
+  const { problemSchema } = await import('#shared/problems/problem-schema');
+  return problemSchema.safeParse(content).data;
+}
+
 /** What a failed request amounts to; anything that is not an answer of HTTP is thrown on. */
 export async function problemOf(error: unknown): Promise<ProblemError> {
   if (!(error instanceof HttpErrorResponse)) throw error;
   if (error.status === 0)
     return new ProblemError(plain(0, $localize`The workshop’s records cannot be reached just now.`));
-  const parsed = problemSchema.safeParse(await contentOf(error));
+  const described = await describedIn(await contentOf(error)).catch(() => undefined);
   const wait = Number(error.headers.get('retry-after'));
-  const problem = parsed.success
-    ? parsed.data
-    : plain(error.status, $localize`The server could not answer (${error.status}:status:).`);
+  const problem = described ?? plain(error.status, $localize`The server could not answer (${error.status}:status:).`);
   return new ProblemError(problem, wait > 0 ? wait : undefined);
 }
