@@ -10,7 +10,7 @@ const minute_milliseconds = 60_000;
 /** A busy machine makes a test slow, not wrong. */
 const testLimit_milliseconds = 60_000;
 
-/** They open the built application, so they come after everything else. */
+/** They open the built application, so they come after everything else; three at a time, since a browser waits for a third of its time. */
 const onTheBuiltApplication = ['test/start', 'test/journeys'];
 
 const say = (text) => console.log(`\n— ${text}`);
@@ -78,7 +78,7 @@ async function runAll() {
   mkdirSync(join(root, '.cache'), { recursive: true });
   const results = await Promise.all(['check:types', 'check:lint', 'check:layers', 'build'].map(check));
   results.push(await jest('specifications', later.length > 0 ? ['--ignoreProjects', ...later] : [], 20));
-  if (later.length > 0) results.push(await jest('the built application', ['--selectProjects', ...later], 20));
+  if (later.length > 0) results.push(await jest('the built application', ['--maxWorkers=3', '--selectProjects', ...later], 20));
   return results;
 }
 

@@ -34,14 +34,15 @@ export class LetterForm {
   readonly kept = output<LetterTemplate>();
 
   protected readonly form = schemaForm(letterTextSchema, { subject: '', text: '' });
-  private readonly rested = toSignal(toObservable(this.form.parsed).pipe(debounceTime(pause_ms)));
+  /** What is shown as a letter: the words with the kind they were written for, since of another one they may name what it does not know. */
+  private readonly written = computed(() => {
+    const words = this.form.parsed();
+    return words && { kind: this.template().kind, ...words };
+  });
+  private readonly rested = toSignal(toObservable(this.written).pipe(debounceTime(pause_ms)));
   private readonly previewing = resource({
-    params: () => {
-      const words = this.rested();
-      return words && { kind: this.template().kind, words };
-    },
-    loader: ({ params: { kind, words }, abortSignal }) =>
-      this.api.call(previewLetter, { body: { kind, ...words }, signal: abortSignal }),
+    params: () => this.rested(),
+    loader: ({ params: body, abortSignal }) => this.api.call(previewLetter, { body, signal: abortSignal }),
   });
   protected readonly preview = computed(() => (this.previewing.hasValue() ? this.previewing.value() : undefined));
   protected readonly problem = computed(() => this.previewing.error()?.message ?? '');

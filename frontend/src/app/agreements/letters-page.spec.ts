@@ -48,6 +48,20 @@ describe('LettersPage', () => {
     expect(page.element.querySelector('.sheet .text')?.textContent).toBe('Dear Helena Marsh, estimate.');
   });
 
+  it('asks for no letter of one kind with the words of another, while its reader goes from one to the other', async () => {
+    const page = await open({ kind: 'estimate' });
+    await rested();
+    await page.settle();
+    await page.answer(previews, { subject: 'About', text: 'Dear', html: '' }, 'POST');
+    page.fixture.componentRef.setInput('kind', 'answer');
+    await page.settle();
+    page.http.expectNone(previews);
+    await rested();
+    await page.settle();
+    const { body } = page.http.expectOne(previews).request;
+    expect(body).toEqual({ kind: 'answer', subject: 'About answer', text: 'Dear {client}, answer.' });
+  });
+
   it('says why there is nothing to show where a brace stands alone', async () => {
     const page = await open();
     await page.enter('subject', 'Your { estimate');
