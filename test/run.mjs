@@ -1,4 +1,7 @@
-/** Runs every check there is, one after the other, and ends with one plain line: how many passed, how many failed. */
+/**
+ * Runs every check there is and ends with one plain line: how many passed, how many failed. What the specifications need is built first; the
+ * checks that read the sources go on beside them.
+ */
 import { spawn } from 'node:child_process';
 import { closeSync, existsSync, mkdirSync, openSync, readdirSync, readFileSync, rmSync } from 'node:fs';
 import { dirname, join } from 'node:path';
@@ -76,10 +79,12 @@ const hasSpecs = (folder) =>
 async function runAll() {
   const later = onTheBuiltApplication.filter(hasSpecs);
   mkdirSync(join(root, '.cache'), { recursive: true });
-  const results = await Promise.all(['check:types', 'check:lint', 'check:layers', 'build'].map(check));
+  const checks = ['check:types', 'check:lint', 'check:layers'].map(check);
+  const results = [await check('build')];
   results.push(await jest('specifications', later.length > 0 ? ['--ignoreProjects', ...later] : [], 20));
-  if (later.length > 0) results.push(await jest('the built application', ['--maxWorkers=3', '--selectProjects', ...later], 20));
-  return results;
+  if (later.length > 0)
+    results.push(await jest('the built application', ['--maxWorkers=3', '--selectProjects', ...later], 20));
+  return [...results, ...(await Promise.all(checks))];
 }
 
 const results = await runAll();

@@ -19,6 +19,7 @@ import { handsAndOvertime } from './0055-hands-and-overtime';
 import { currencyOfCards } from './0056-currency-of-cards';
 import { reachedStages } from './0057-reached-stages';
 import { leftSince } from './0058-left-since';
+import { totalsInLetters } from './0059-totals-in-letters';
 
 /** Every step of the schema, in the order in which they are taken. A step that was released is never changed. */
 export const migrations: readonly Migration[] = [
@@ -42,4 +43,5 @@ export const migrations: readonly Migration[] = [
   currencyOfCards,
   reachedStages,
   leftSince,
+  totalsInLetters,
 ];

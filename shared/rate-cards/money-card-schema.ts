@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { isRated } from '#shared/money/is-rated';
 import {
   cardItemId,
   cardItemName,
@@ -18,13 +19,12 @@ import {
 
 const gradeSchema = z.strictObject({ id: cardItemId, name: cardItemName, costPerHour: decimalEntry });
 
-/** Categories that charge a tax; all others charge none (EN 16931, BR-S-05, BR-Z/E/AE/IC/G/O-09). */
-const taxed: readonly TaxCode[] = ['S', 'L', 'M'];
 /** Categories that have to say why nothing is charged (EN 16931, BR-E-10, BR-AE-10, BR-IC-10, BR-G-10, BR-O-10). */
 const explained: readonly TaxCode[] = ['E', 'AE', 'K', 'G', 'O'];
 
+/** Who has a rate charges it, all others charge none (EN 16931, BR-S-05, BR-Z/E/AE/IC/G/O-09). */
 const rateFits = ({ code, percent }: TaxCategory): boolean =>
-  code === 'S' ? Number(percent) > 0 : taxed.includes(code) || Number(percent) === 0;
+  code === 'S' ? Number(percent) > 0 : isRated(code) || Number(percent) === 0;
 const reasonFits = ({ code, exemptionReason }: TaxCategory): boolean =>
   explained.includes(code) === (exemptionReason !== '');
 

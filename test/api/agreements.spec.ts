@@ -346,7 +346,7 @@ describe('The words of letters', () => {
     expect((await keep({ ...own, subject: 'Later' }, 0)).status).toBe(412);
     await acceptedIssue(api.ours, api);
     const mail = (await api.mails()).find(({ headers }) => headers.includes('Subject: Thanks, '));
-    expect(mail?.text).toMatch(/^Dear Herons client \d+,\n\n.*issue A for Herons base it is: /);
+    expect(mail?.text).toMatch(/^Dear Herons client \d+,\n\n.*issue A for Herons base it is: €[\d.,]+ with tax\.\n$/);
     const reset = await api.as('office').call(resetLetterTemplate, { body: { kind: 'accepted' } });
     expect(reset.body).toMatchObject({ version: 0, text: usual?.text });
   });

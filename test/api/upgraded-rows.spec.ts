@@ -1,5 +1,7 @@
 import type { CostedEstimate } from '#shared/estimates/estimate-schema';
 import { changeEstimate, readEstimate } from '#shared/estimates/estimates-endpoints';
+import { keepLetterTemplate, listLetterTemplates } from '#shared/agreements/letters-endpoints';
+import { totalsInLetters } from '../../backend/migrations/0059-totals-in-letters';
 import { currencyOfCards } from '../../backend/migrations/0056-currency-of-cards';
 import { severalMeasures } from '../../backend/migrations/0054-several-measures';
 import { draftCard, wholeCard } from './sample-card';
@@ -77,4 +79,18 @@ test('a card of the workshop’s own is meant in the currency there is; the star
   await take(currencyOfCards);
   expect((await wholeCard(api.ours, id)).content.money.currency).toBe('EUR');
   expect((await wholeCard(api.ours, basedOnId ?? '')).content.money.currency).toBeUndefined();
+});
+
+test('words of a letter that said “with tax” after the total leave it to the total', async () => {
+  const text = 'It comes to {total} with tax, {client}.';
+  const office = api.as('office');
+  await office.call(keepLetterTemplate, {
+    version: 0,
+    body: { kind: 'accepted', subject: 'Ours: {total} with tax', text },
+  });
+  await take(totalsInLetters);
+  const { items } = (await office.call(listLetterTemplates)).body as { items: readonly { kind: string }[] };
+  expect(items.find(({ kind }) => kind === 'accepted')).toMatchObject({
+    ...{ version: 1, subject: 'Ours: {total}', text: 'It comes to {total}, {client}.' },
+  });
 });

@@ -12,13 +12,14 @@ import {
   type SampleIssue,
 } from '../api/sample-client-visit';
 import { sampleMember } from '../api/sample-estimate';
+import { variationDraft } from '../api/sample-variation';
 import { v7 as newId } from 'uuid';
 import { clientAt, emailOf, hashAt, linkOf, mailTo, reviewAs, seenButton } from './client-journey';
 import { Keyboard } from './keyboard';
 import { screens, turnTo } from './screens';
 import { done } from './stage';
 import { isTooWide, violations } from './violations';
-import { Walk } from './walk';
+import { Walk, type Person } from './walk';
 
 /** An estimate on its way to the client and back: sent, asked about, chosen of, accepted; varied, replaced, taken back. */
 let walk: Walk;
@@ -35,6 +36,16 @@ async function sendFrom(page: Page, email: string): Promise<string> {
   await page.getByRole('button', { name: 'Send it to the client' }).click();
   await page.getByText('The letter is on its way.').waitFor();
   return linkOf(walk, await mailTo(walk, email));
+}
+
+/** Issues an estimate on its page, and sends it; answers where the link of the letter leads. */
+async function issuedBy({ page }: Person, estimate: SampleIssue): Promise<string> {
+  await page.goto(`${walk.address}/jobs/${estimate.jobId}/estimates/${estimate.estimateId}/issue`);
+  await page.getByRole('button', { name: 'Issue A' }).click();
+  await page.getByText('Issue A is made, with its papers.').waitFor();
+  const [issue] = await walk.api.app.estimates.issues.ofEstimate(walk.api.ours.id, estimate.estimateId);
+  await page.goto(placeOf({ ...estimate, issueId: issue?.id ?? '' }));
+  return sendFrom(page, await emailOf(walk, estimate));
 }
 
 const read = async (page: Page): Promise<string> => (await page.locator('body').innerText()).replace(/\s+/g, ' ');
@@ -165,12 +176,7 @@ it('is varied: a small estimate of its own, accepted the same way, and the contr
     { kind: 'member', id: newId(), version: 0, content: sampleMember(pieceId, 'Crest rail') },
   ];
   await done(walk, changeEstimate, { params: { estimateId }, body: { changes } });
-  await owner.page.goto(`${walk.address}/jobs/${sample.jobId}/estimates/${estimateId}/issue`);
-  await owner.page.getByRole('button', { name: 'Issue A' }).click();
-  await owner.page.getByText('Issue A is made, with its papers.').waitFor();
-  const [issue] = await walk.api.app.estimates.issues.ofEstimate(walk.api.ours.id, estimateId);
-  await owner.page.goto(placeOf({ ...sample, estimateId, issueId: issue?.id ?? '' }));
-  const client = await clientAt(walk, await sendFrom(owner.page, await emailOf(walk, sample)));
+  const client = await clientAt(walk, await issuedBy(owner, { ...sample, estimateId }));
   await client.see('journey client variation');
   await reviewAs(client.page, 'Helena Marsh');
   await client.page.getByRole('button', { name: 'Accept', exact: true }).tap();
@@ -181,6 +187,32 @@ it('is varied: a small estimate of its own, accepted the same way, and the contr
   await owner.see('journey client varied contract');
   const contract = await walk.api.app.agreements.contracts.contract(walk.api.ours.id, sample.jobId);
   expect(contract?.parts.map(({ kind }) => kind)).toEqual(['estimate', 'variation']);
+}, 180_000);
+
+it('is varied by less: what is taken off is said before it is accepted, and the contract is smaller by it', async () => {
+  const sample = await acceptedIssue(walk.api.ours, walk.api);
+  const contract = () => walk.api.app.agreements.contracts.contract(walk.api.ours.id, sample.jobId);
+  const before = (await contract())?.gross_minor ?? 0;
+  const estimateId = await variationDraft(walk.api.ours, walk.api, { jobId: sample.jobId, price: '-200' });
+  const owner = await walk.as('owner');
+  const client = await clientAt(walk, await issuedBy(owner, { ...sample, estimateId }));
+  const said = client.page.getByText(/is taken off what was agreed/);
+  await said.scrollIntoViewIfNeeded();
+  expect(await violations(client.page)).toEqual([]);
+  await client.see('journey client variation by less');
+  await reviewAs(client.page, 'Helena Marsh');
+  await said.waitFor();
+  await client.see('journey client variation by less, last look');
+  await client.page.getByRole('button', { name: 'Accept', exact: true }).tap();
+  await client.page.getByText(/Accepted by Helena Marsh/).waitFor();
+  await owner.page.goto(`${walk.address}/jobs/${sample.jobId}`);
+  await owner.page.getByRole('heading', { name: 'The contract', exact: true }).waitFor();
+  expect(await owner.page.locator('app-job-agreement tbody tr').count()).toBe(2);
+  await owner.see('journey client contract by less');
+  const [, variation] = (await contract())?.parts ?? [];
+  expect(variation?.net_minor).toBe(-20_000);
+  expect((await contract())?.gross_minor).toBe(before + (variation?.gross_minor ?? 0));
+  expect([...owner.complaints, ...client.complaints]).toEqual([]);
 }, 180_000);
 
 it('is accepted by the keyboard alone', async () => {

@@ -105,9 +105,9 @@ export class AccessService {
     await this.parts.letters.post(actor.workshopId, {
       kind: estimate.kind,
       client,
-      values: ({ money, day }) => ({
+      values: ({ total, day }) => ({
         ...{ job: job.title, link, number, note: request.note },
-        ...{ total: money(row.grossMinor, estimate.currency), day: day(row.validUntil) },
+        ...{ total: total(row, estimate.currency), day: day(row.validUntil) },
       }),
     });
     if (row.state === 'issued')

@@ -25,7 +25,7 @@ export class DecisionLetters {
   ): Promise<void> {
     const enclosures = row.fileId === null ? [] : [{ fileId: row.fileId }];
     const client = await this.parts.jobs.client(workshopId, clientId);
-    const total = ({ money }: LetterFigures) => money(row.grossMinor, issue.estimate.currency);
+    const total = (figures: LetterFigures) => figures.total(row, issue.estimate.currency);
     const { job, number } = this.named(issue);
     const values = (figures: LetterFigures) => ({ job, number, total: total(figures) });
     await this.parts.letters.post(workshopId, { kind: 'accepted', client, values, enclosures });

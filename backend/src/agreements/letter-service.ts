@@ -1,6 +1,7 @@
 import { filledLetter, paragraphsOf, type FilledLetter, type LetterValues } from '#shared/agreements/filled-letter';
 import type { LetterText } from '#shared/agreements/letter-complaints';
 import type { LetterKind } from '#shared/agreements/letter-kinds';
+import { isRated } from '#shared/money/is-rated';
 import type { Accounts, WorkshopSettingsRow } from '../accounts';
 import type { ClientRow } from '../jobs';
 import { words } from '../platform/http/words';
@@ -68,7 +69,7 @@ export class LetterService {
   async preview(workshopId: string, kind: LetterKind, text: LetterText): Promise<FilledLetter> {
     refuseFaulty(kind, text);
     const workshop = await this.parts.accounts.workshops.get(workshopId);
-    return this.fill(workshop, text, exampleValues(workshop));
+    return this.fill(workshop, text, exampleValues(workshop, kind));
   }
 
   givenUp(workshopId: string): Promise<GivenUpLetter[]> {
@@ -91,16 +92,23 @@ export class LetterService {
   }
 }
 
+/** Letters about what a client is to accept, or has accepted. */
+const offering: readonly LetterKind[] = ['estimate', 'variation', 'accepted'];
+
 /** What a preview is filled with; it names nobody. */
-function exampleValues(workshop: WorkshopSettingsRow): LetterValues {
-  const { money, day } = letterFigures(workshop);
+function exampleValues(workshop: WorkshopSettingsRow, kind: LetterKind): LetterValues {
+  const { money, total, day } = letterFigures(workshop);
+  const grossMinor = 1_284_000;
+  const taxMinor = isRated(workshop.defaultTaxCategory) ? 214_000 : 0;
   return {
     client: words('example-client'),
     workshop: workshop.name,
     job: words('example-job'),
     link: 'https://example.org/client#…',
     number: words('paper-number-letter', { number: '2026-014-1', letter: 'A' }),
-    total: money(1_284_000, workshop.currency),
+    total: offering.includes(kind)
+      ? total({ grossMinor, taxMinor }, workshop.currency)
+      : money(grossMinor, workshop.currency),
     open: money(642_000, workshop.currency),
     day: day('2026-09-30'),
     note: words('example-note'),

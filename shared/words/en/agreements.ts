@@ -37,19 +37,20 @@ export const agreements = {
   'history-letter-template-reset': 'Went back to the usual words of a letter',
   'letter-estimate-subject': '{workshop}: estimate {number} for {job}',
   'letter-estimate-text':
-    'Dear {client},\n\nour estimate {number} for {job} is ready to read. It comes to {total} with tax and holds until {day}.\n\n{note}\n\nHere you can read it, choose among alternatives, ask about it and accept it:\n\n{link}\n\nThe link is meant for you alone.\n\nWith kind regards\n{workshop}\n',
+    'Dear {client},\n\nour estimate {number} for {job} is ready to read. It comes to {total} and holds until {day}.\n\n{note}\n\nHere you can read it, choose among alternatives, ask about it and accept it:\n\n{link}\n\nThe link is meant for you alone.\n\nWith kind regards\n{workshop}\n',
   'letter-variation-subject': '{workshop}: variation {number} for {job}',
   'letter-variation-text':
-    'Dear {client},\n\nfor {job} there is a change to agree on, variation {number}. It comes to {total} with tax and holds until {day}.\n\n{note}\n\nHere you can read it, ask about it and accept it:\n\n{link}\n\nThe link is meant for you alone.\n\nWith kind regards\n{workshop}\n',
+    'Dear {client},\n\nfor {job} there is a change to agree on, variation {number}. It comes to {total} and holds until {day}.\n\n{note}\n\nHere you can read it, ask about it and accept it:\n\n{link}\n\nThe link is meant for you alone.\n\nWith kind regards\n{workshop}\n',
   'letter-answer-subject': '{workshop}: about {job}',
   'letter-answer-text':
     'Dear {client},\n\nabout {job}:\n\n{text}\n\nThe link you were sent before opens the papers and everything written so far. If it has ended, simply answer this letter.\n\nWith kind regards\n{workshop}\n',
   'letter-accepted-subject': '{workshop}: {number} is accepted',
   'letter-accepted-text':
-    'Dear {client},\n\nthank you. You have accepted {number} for {job}, {total} with tax. The paper you accepted is attached; please keep it.\n\nWith kind regards\n{workshop}\n',
+    'Dear {client},\n\nthank you. You have accepted {number} for {job}, {total}. The paper you accepted is attached; please keep it.\n\nWith kind regards\n{workshop}\n',
   'letter-sign-in-subject': '{workshop}: your papers',
   'letter-sign-in-text':
     'Dear {client},\n\nsomebody, most likely you, asked for a way to your papers at {workshop}. This link opens them for an hour:\n\n{link}\n\nIf it was not you, nothing has to be done.\n\n{workshop}\n',
+  'letter-total': '{total}{taxed, select, yes { with tax} other {}}',
   'letter-job-none': 'work done for you',
   'letter-invoice-subject': '{workshop}: invoice {number}',
   'letter-invoice-text':
@@ -71,7 +72,7 @@ export const agreements = {
     '{client} writes about {number}, {job}:\n\n{text}\n\nAnswer in the job itself, so that it stands in the thread:\n\n{link}\n',
   'notice-accepted-subject': '{client} has accepted {number}',
   'notice-accepted-text':
-    '{client} has accepted {number} for {job}, {total} with tax, signed as {signed}. {chosen}\n\nThe accepted paper is attached.\n\n{link}\n',
+    '{client} has accepted {number} for {job}, {total}, signed as {signed}. {chosen}\n\nThe accepted paper is attached.\n\n{link}\n',
   'notice-chosen': 'Alternatives chosen: {names}.',
   'notice-chosen-base': 'It is accepted as offered, without alternatives.',
   'notice-declined-subject': '{client} has declined {number}',

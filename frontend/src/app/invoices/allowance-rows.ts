@@ -4,13 +4,14 @@ import { MatButton, MatIconButton } from '@angular/material/button';
 import type { InvoiceContent } from '#shared/invoices/invoice';
 import type { DocumentAllowanceOrCharge } from '#shared/invoices/invoice-lines';
 import type { MinorUnits } from '#shared/money/decimal';
+import { isRated } from '#shared/money/is-rated';
 import type { AnyDocumentForm } from '../core/forms/document-form';
 import { Session } from '../core/session/session';
 import { AmountField } from '../ui/field/amount-field';
 import { DecimalField } from '../ui/field/decimal-field';
 import { EntryAt } from '../ui/field/entry-at';
 import { Icon } from '../ui/icon/icon';
-import { isRated, taxCodeChoices } from './tax-code-names';
+import { taxCodeChoices } from './tax-code-names';
 import { firstTax } from './first-tax';
 
 /** What comes off or on, of a line or of the whole: a fixed amount, or a share of what it is taken from. */

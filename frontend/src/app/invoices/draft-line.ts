@@ -3,6 +3,7 @@ import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton, MatIconButton } from '@angular/material/button';
 import type { InvoiceContent } from '#shared/invoices/invoice';
 import type { MinorUnits } from '#shared/money/decimal';
+import { isRated } from '#shared/money/is-rated';
 import type { TaxCode } from '#shared/money/tax-by-category';
 import type { AnyDocumentForm } from '../core/forms/document-form';
 import { Formats } from '../core/formats/formats';
@@ -10,7 +11,7 @@ import { DecimalField } from '../ui/field/decimal-field';
 import { EntryAt } from '../ui/field/entry-at';
 import { Icon } from '../ui/icon/icon';
 import { AllowanceRows } from './allowance-rows';
-import { isRated, taxCodeChoices, taxCodeNames } from './tax-code-names';
+import { taxCodeChoices, taxCodeNames } from './tax-code-names';
 import { unitChoices } from './unit-choices';
 
 /** One line of a draft: what, how much of it, at which price, under which tax; its amount follows. */

@@ -1,6 +1,6 @@
+import { isRated } from '#shared/money/is-rated';
 import type { TaxCode } from '#shared/money/tax-by-category';
 import type { Session } from '../core/session/session';
-import { isRated } from './tax-code-names';
 
 /** The tax a first line begins with: as the workshop usually works, with its rate still to be entered. */
 export function firstTax(session: Session): { code: TaxCode; percent: string } {

@@ -1,9 +1,10 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import type { InvoiceKind } from '#shared/invoices/invoice';
+import { isRated } from '#shared/money/is-rated';
 import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
 import type { InvoiceAmounts } from './draft-amounts';
-import { isRated, taxCodeNames } from './tax-code-names';
+import { taxCodeNames } from './tax-code-names';
 
 /** What an invoice comes to: net, tax by category, gross, and what is to be paid of it. */
 @Component({

@@ -5,6 +5,7 @@ import { exemptionOf } from '#shared/invoices/exemption-of';
 import type { Invoice, InvoicePaper } from '#shared/invoices/invoice-schema';
 import { readInvoicePaper } from '#shared/invoices/invoices-endpoints';
 import { currencyDigits } from '#shared/money/currency-digits';
+import { isRated } from '#shared/money/is-rated';
 import { sumMinor } from '#shared/money/sum-minor';
 import { addressOf } from '../core/api/address-of';
 import { Formats } from '../core/formats/formats';
@@ -18,7 +19,7 @@ import { InvoiceCalls } from './invoice-calls';
 import { InvoiceRelated } from './invoice-related';
 import { InvoiceSums } from './invoice-sums';
 import { NotedLetterForm } from './noted-letter-form';
-import { isRated, taxCodeNames } from './tax-code-names';
+import { taxCodeNames } from './tax-code-names';
 import { WriteOffForm } from './write-off-form';
 
 const paperNames: Readonly<Record<InvoicePaper, string>> = {

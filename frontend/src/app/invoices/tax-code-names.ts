@@ -15,6 +15,3 @@ export const taxCodeNames: Readonly<Record<TaxCode, string>> = {
 
 /** How a line may be taxed. */
 export const taxCodeChoices = taxCodes.map((value) => ({ value, label: taxCodeNames[value] }));
-
-/** Categories with a rate of their own; everything else charges nothing. */
-export const isRated = (code: TaxCode): boolean => ['S', 'L', 'M', 'B'].includes(code);
