@@ -347,7 +347,7 @@ describe('The page of an issue', () => {
     const visitor = await clientOf(api.ours, api, sample.issueId);
     const later = await issueOf(api.ours, api, sample.estimateId);
     expect(await pageOf(visitor, sample.issueId)).toMatchObject({ issue: { state: 'replaced' }, replacedBy: null });
-    const body = { state: 'sent', day: api.clock.now().toISOString().slice(0, 10), note: '' };
+    const body = { state: 'sent', day: await api.app.rateCards.service.today(api.ours.id), note: '' };
     await api.as('office').call(markIssue, { params: { issueId: later }, body });
     expect(await pageOf(visitor, sample.issueId)).toMatchObject({ issue: { state: 'replaced' }, replacedBy: later });
     expect((await pageOf(visitor, later)).issue).toMatchObject({ state: 'open', letter: 'B' });

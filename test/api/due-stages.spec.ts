@@ -83,7 +83,7 @@ describe('What can be invoiced', () => {
       const sample = await acceptedIssue(api.ours, api);
       expect(await workOf(sample.issueId)).toMatchObject({ dueOn: null, isReached: false });
       await name(sample, 'planned', { day: '2031-04-01' });
-      const today = api.clock.now().toISOString().slice(0, 10);
+      const today = await api.app.rateCards.service.today(api.ours.id);
       expect((await name(sample, 'reached', { day: today })).status).toBe(204);
       expect(await workOf(sample.issueId)).toMatchObject({ dueOn: today, isReached: true });
       expect(await daysOf(sample.jobId)).toEqual(['2031-04-01', today]);

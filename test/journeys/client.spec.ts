@@ -149,7 +149,7 @@ it('leads from a replaced issue to the later one', async () => {
   const sample = await sampleIssue(walk.api.ours, walk.api);
   const { token } = await linkTo(walk.api.ours, walk.api, sample.issueId);
   const later = await issueOf(walk.api.ours, walk.api, sample.estimateId);
-  const day = walk.api.clock.now().toISOString().slice(0, 10);
+  const day = await walk.api.app.rateCards.service.today(walk.api.ours.id);
   await done(walk, markIssue, { params: { issueId: later }, body: { state: 'sent', day, note: '' } });
   const { page, see } = await clientAt(walk, `${walk.address}/client#${token}`);
   expect(page.url()).toContain(later);

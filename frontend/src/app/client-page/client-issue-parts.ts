@@ -10,6 +10,7 @@ import { ClientIssueStore, partsOfIssue } from './client-issue-store';
 import { ClientLines } from './client-lines';
 import { ClientPayments } from './client-payments';
 import { ClientThread } from './client-thread';
+import { takenAway } from './taken-away';
 
 /** An estimate below its pieces, part after part: the choices, the price, the terms, questions, and the answer. */
 @Component({
@@ -33,10 +34,9 @@ export class ClientIssueParts {
     (this.store.price()?.care ?? []).map((code) => this.words.say(code as 'care-handling')),
   );
   /** What a variation takes away, in words. */
-  protected readonly takenAway = computed(() => {
-    const { gross_minor } = this.store.price() ?? { gross_minor: 0 };
-    return gross_minor < 0 ? this.words.say('paper-takes-away', { amount: this.formats.money(-gross_minor) }) : '';
-  });
+  protected readonly takenAway = computed(() =>
+    takenAway({ words: this.words, formats: this.formats }, this.store.price()),
+  );
   protected readonly dates = computed(() => {
     const programme = this.store.programme();
     if (!programme) return '';

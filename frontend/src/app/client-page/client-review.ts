@@ -16,6 +16,7 @@ import { FormComplaint } from '../ui/field/form-complaint';
 import { Skeleton } from '../ui/page/skeleton';
 import { ClientIssueStore } from './client-issue-store';
 import { acceptanceFormSchema } from './acceptance-form';
+import { takenAway } from './taken-away';
 
 /** The last look: what was chosen, what it comes to, the paper itself; a typed name and a tick accept it. */
 @Component({
@@ -52,10 +53,9 @@ export class ClientReview {
     return offered.filter(({ id }) => this.store.choice().includes(id));
   });
   protected readonly isVariation = computed(() => this.store.issue()?.issue.kind === 'variation');
-  protected readonly takenAway = computed(() => {
-    const gross_minor = this.review()?.price.gross_minor ?? 0;
-    return gross_minor < 0 ? this.words.say('paper-takes-away', { amount: this.formats.money(-gross_minor) }) : '';
-  });
+  protected readonly takenAway = computed(() =>
+    takenAway({ words: this.words, formats: this.formats }, this.review()?.price),
+  );
   protected readonly mayBeTaxed = computed(() => !isOutsideTax(this.review()?.price.taxes ?? []));
   protected readonly firstPayment = computed(() => this.review()?.price.payments[0]?.paid_minor);
   protected readonly paper = computed(() => {
