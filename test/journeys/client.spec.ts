@@ -48,6 +48,15 @@ async function issuedBy({ page }: Person, estimate: SampleIssue): Promise<string
   return sendFrom(page, await emailOf(walk, estimate));
 }
 
+/** The client's last press on a variation; the owner then finds both parts in the contract. */
+async function agreeTo(client: Person, owner: Person, { jobId }: SampleIssue): Promise<void> {
+  await client.page.getByRole('button', { name: 'Accept', exact: true }).tap();
+  await client.page.getByText(/Accepted by Helena Marsh/).waitFor();
+  await owner.page.goto(`${walk.address}/jobs/${jobId}`);
+  await owner.page.getByRole('heading', { name: 'The contract', exact: true }).waitFor();
+  expect(await owner.page.locator('app-job-agreement tbody tr').count()).toBe(2);
+}
+
 const read = async (page: Page): Promise<string> => (await page.locator('body').innerText()).replace(/\s+/g, ' ');
 const sumOf = (page: Page) => page.locator('.bar .sum').innerText();
 
@@ -179,11 +188,7 @@ it('is varied: a small estimate of its own, accepted the same way, and the contr
   const client = await clientAt(walk, await issuedBy(owner, { ...sample, estimateId }));
   await client.see('journey client variation');
   await reviewAs(client.page, 'Helena Marsh');
-  await client.page.getByRole('button', { name: 'Accept', exact: true }).tap();
-  await client.page.getByText(/Accepted by Helena Marsh/).waitFor();
-  await owner.page.goto(`${walk.address}/jobs/${sample.jobId}`);
-  await owner.page.getByRole('heading', { name: 'The contract', exact: true }).waitFor();
-  expect(await owner.page.locator('app-job-agreement tbody tr').count()).toBe(2);
+  await agreeTo(client, owner, sample);
   await owner.see('journey client varied contract');
   const contract = await walk.api.app.agreements.contracts.contract(walk.api.ours.id, sample.jobId);
   expect(contract?.parts.map(({ kind }) => kind)).toEqual(['estimate', 'variation']);
@@ -203,11 +208,7 @@ it('is varied by less: what is taken off is said before it is accepted, and the 
   await reviewAs(client.page, 'Helena Marsh');
   await said.waitFor();
   await client.see('journey client variation by less, last look');
-  await client.page.getByRole('button', { name: 'Accept', exact: true }).tap();
-  await client.page.getByText(/Accepted by Helena Marsh/).waitFor();
-  await owner.page.goto(`${walk.address}/jobs/${sample.jobId}`);
-  await owner.page.getByRole('heading', { name: 'The contract', exact: true }).waitFor();
-  expect(await owner.page.locator('app-job-agreement tbody tr').count()).toBe(2);
+  await agreeTo(client, owner, sample);
   await owner.see('journey client contract by less');
   const [, variation] = (await contract())?.parts ?? [];
   expect(variation?.net_minor).toBe(-20_000);
