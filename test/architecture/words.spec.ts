@@ -1,37 +1,6 @@
-import IntlMessageFormat from 'intl-messageformat';
-import * as path from 'node:path';
 import * as ts from 'typescript';
+import { catalogueOf, entriesOf, languages, valuesOf, wordFiles, type Catalogue } from './catalogue-files';
 import { isSpec, isTypeScript, projectFiles, textOf } from './project-files';
-
-type Catalogue = Readonly<Record<string, string>>;
-type MessagePart = ReturnType<IntlMessageFormat['getAst']>[number];
-
-/** How the parser numbers a piece of plain text and the # of a plural. */
-const plainText = 0;
-const countSign = 7;
-
-const wordFiles = projectFiles(['shared/words'], (file) =>
-  /^shared\/words\/[a-z]{2}(-[A-Z]{2})?\/[^/]+\.ts$/.test(file),
-);
-const languages = [...new Set(wordFiles.map((file) => path.basename(path.dirname(file))))];
-
-/** The codes of one file with their messages, as written. */
-function messagesOf(file: string): [string, string][] {
-  const found: [string, string][] = [];
-  const visit = (node: ts.Node): void => {
-    if (ts.isPropertyAssignment(node) && ts.isStringLiteralLike(node.initializer)) {
-      found.push([(node.name as ts.StringLiteral | ts.Identifier).text, node.initializer.text]);
-    }
-    ts.forEachChild(node, visit);
-  };
-  visit(ts.createSourceFile(file, textOf(file), ts.ScriptTarget.Latest));
-  return found;
-}
-
-const entriesOf = (language: string): [string, string][] =>
-  wordFiles.filter((file) => file.startsWith(`shared/words/${language}/`)).flatMap(messagesOf);
-
-const catalogueOf = (language: string): Catalogue => Object.fromEntries(entriesOf(language));
 
 /** A text written somewhere: whole, or with parts that only the run knows. */
 interface Mention {
@@ -66,20 +35,6 @@ function unusedCodes(codes: readonly string[], files: readonly string[]): string
   const whole = new Set(mentions.map((mention) => mention.whole));
   const patterns = mentions.flatMap(({ pattern }) => pattern ?? []);
   return codes.filter((code) => !whole.has(code) && !patterns.some((pattern) => pattern.test(code)));
-}
-
-function valuesIn(parts: readonly MessagePart[]): string[] {
-  return parts.flatMap((part): string[] => {
-    const kind: number = part.type;
-    if (kind === plainText || kind === countSign || !('value' in part)) return [];
-    const branches = 'options' in part ? Object.values(part.options) : [];
-    return [part.value, ...branches.flatMap(({ value }) => valuesIn(value))];
-  });
-}
-
-function valuesOf(message: string): string[] {
-  const parts = new IntlMessageFormat(message, 'en', undefined, { ignoreTag: true }).getAst();
-  return [...new Set(valuesIn(parts))].sort();
 }
 
 function unreadable([code, message]: [string, string]): string[] {
