@@ -5,6 +5,7 @@ import { readAcceptedPaper } from '#shared/agreements/agreement-endpoints';
 import type { Job } from '#shared/jobs/job-schema';
 import { addressOf } from '../core/api/address-of';
 import { Formats } from '../core/formats/formats';
+import { grossText } from '../core/formats/price-text';
 import { newId } from '../core/new-id';
 import { Notices } from '../core/problems/notices';
 import { ProblemError } from '../core/problems/problem-error';
@@ -47,6 +48,7 @@ export class JobAgreement {
   protected readonly decisions = computed(() =>
     (this.agreement()?.decisions ?? []).map((decision) => ({
       ...decision,
+      total: grossText(this.formats, decision),
       chosen: decision.alternatives.join(', '),
       when: $localize`${this.formats.dayOf(decision.at)}:day:, ${this.formats.time(decision.at)}:time:`,
       paper: decision.pdfSha256 ? addressOf(readAcceptedPaper, { params: { decisionId: decision.id } }) : '',

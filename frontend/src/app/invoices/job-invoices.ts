@@ -74,6 +74,9 @@ export class JobInvoices {
       firstWork: part.gross_minor < 0 ? undefined : part.next.find(({ claim }) => claim.of === 'work')?.claim,
     })),
   );
+  protected readonly isTaxed = computed(() =>
+    (this.contract()?.parts ?? []).some(({ net_minor, gross_minor }) => net_minor !== gross_minor),
+  );
   /** The share of the contract that is invoiced, for the bar; figures stand beside it. */
   protected readonly share_percent = computed(() => {
     const contract = this.contract();

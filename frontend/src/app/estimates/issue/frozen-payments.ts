@@ -14,11 +14,10 @@ import { TakenAwayNote } from '../price/taken-away-note';
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @if (gross_minor() < 0) {
-      <app-taken-away-note [gross_minor]="gross_minor()" />
+      <app-taken-away-note [gross_minor]="gross_minor()" [tax_minor]="tax_minor()" />
     } @else {
       <app-figure-table
-        i18n-caption
-        caption="Payments, with tax"
+        [caption]="plan.caption(tax_minor())"
         captionShown
         [columns]="columns()"
         [rows]="rows()"
@@ -29,11 +28,12 @@ import { TakenAwayNote } from '../price/taken-away-note';
 })
 export class FrozenPayments {
   private readonly formats = inject(Formats);
-  private readonly plan = inject(PlanOfPayment);
+  protected readonly plan = inject(PlanOfPayment);
 
   readonly stages = input.required<EstimateSettings['stages']>();
   readonly payments = input.required<StagePayments>();
   readonly gross_minor = input.required<number>();
+  readonly tax_minor = input.required<number>();
 
   protected readonly columns = computed(() => this.plan.columns(() => '', false));
   protected readonly rows = computed(() => {

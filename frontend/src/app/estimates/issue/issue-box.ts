@@ -68,6 +68,7 @@ export class IssueBox {
     () => this.store.issues().find(({ state }) => state === 'accepted')?.letter,
   );
   protected readonly jobRoute = computed(() => ['/jobs', this.store.ids()?.jobId ?? '']);
+  protected readonly isTaxed = computed(() => (this.store.priced()?.price.tax_minor ?? 0) !== 0);
   protected readonly gross = computed(() => this.formats.money(this.store.priced()?.price.gross_minor ?? 0));
 
   private toldOf(kinds: readonly Finding['kind'][]): Finding[] {

@@ -2,6 +2,7 @@ import { NgTemplateOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, input, resource } from '@angular/core';
 import { sumMinor } from '#shared/money/sum-minor';
 import { Formats } from '../../core/formats/formats';
+import { netAndGrossText } from '../../core/formats/price-text';
 import { EstimateStore } from '../estimate-store';
 import { PartList } from '../parts/part-list';
 import { PartPlace } from '../parts/part-place';
@@ -69,8 +70,7 @@ export class IssuePage {
     const sum_minor = sumMinor(changes);
     return this.formats.signed(sum_minor, (size_minor) => this.formats.money(size_minor));
   });
-  protected readonly net = computed(() => this.formats.money(this.store.priced()?.price.net_minor ?? 0));
-  protected readonly gross = computed(() => this.formats.money(this.store.priced()?.price.gross_minor ?? 0));
+  protected readonly sums = computed(() => netAndGrossText(this.formats, this.store.priced()?.price));
   protected readonly draftKey = draftKey;
 
   constructor() {

@@ -4,6 +4,7 @@ import { MatButton } from '@angular/material/button';
 import type { CostedEstimate } from '#shared/estimates/estimate-schema';
 import type { PricedIssueSummary } from '#shared/estimates/issue-schema';
 import { Formats } from '../../core/formats/formats';
+import { netAndGrossText } from '../../core/formats/price-text';
 import { EmptyState } from '../../ui/page/empty-state';
 import { LaterWidget } from '../../ui/page/later-widget';
 import { Skeleton } from '../../ui/page/skeleton';
@@ -88,16 +89,12 @@ export class IssueViewPage {
     return place >= 0 && letter ? $localize`Issue ${letter}:letter:` : '';
   });
   protected readonly net_minor = computed(() => this.issue()?.summary.net_minor ?? 0);
-  protected readonly sums = computed(() => this.written(this.issue()?.summary));
+  protected readonly sums = computed(() => netAndGrossText(this.formats, this.issue()?.summary));
   /** What the client accepted it at. */
-  protected readonly agreedSums = computed(() => this.written(this.issue()?.summary.agreed));
+  protected readonly agreedSums = computed(() => netAndGrossText(this.formats, this.issue()?.summary.agreed));
 
   constructor() {
     inject(PlaceExplanation);
-  }
-
-  private written({ net_minor, gross_minor } = { net_minor: 0, gross_minor: 0 }) {
-    return { net: this.formats.money(net_minor), gross: this.formats.money(gross_minor) };
   }
 
   /** What the client was sent has another state now. */

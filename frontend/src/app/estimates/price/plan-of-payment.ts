@@ -13,6 +13,10 @@ export class PlanOfPayment {
   private readonly formats = inject(Formats);
   private readonly isSmall = smallScreen();
 
+  caption(tax_minor: number): string {
+    return tax_minor === 0 ? $localize`Payments` : $localize`Payments, with tax`;
+  }
+
   columns(remark: (cell: string) => string, mayEdit: boolean): FigureColumn<StageRow>[] {
     return stageColumns(this.formats, { mayEdit, isSmall: this.isSmall(), remark });
   }

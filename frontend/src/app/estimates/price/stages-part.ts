@@ -41,12 +41,13 @@ export class StagesPart {
   private readonly formats = inject(Formats);
   private readonly words = inject(Words);
   private readonly unfinished = inject(UnfinishedEntries);
-  private readonly plan = inject(PlanOfPayment);
+  protected readonly plan = inject(PlanOfPayment);
   protected readonly store = inject(EstimateStore);
 
   protected readonly chosen = signal<string | undefined>(undefined);
   /** What a variation takes away; 0 where something is to be paid. */
   protected readonly takenAway_minor = computed(() => Math.min(0, this.store.priced()?.price.gross_minor ?? 0));
+  protected readonly tax_minor = computed(() => this.store.priced()?.price.tax_minor ?? 0);
   /** As typed, while they do not come to 100 %; else as they are kept. */
   private readonly entries = computed<readonly StageEntry[]>(() => {
     const kept = stageEntriesOf(this.store.settings()?.stages?.parts ?? [], this.formats.locale());
