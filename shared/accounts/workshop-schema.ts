@@ -1,5 +1,6 @@
 import * as z from 'zod';
-import { paperSizes, taxCategories } from '#shared/accounts/workshop-options';
+import { paperSizes } from '#shared/accounts/workshop-options';
+import { taxCodes } from '#shared/money/tax-codes';
 import { currencyEntry } from '#shared/money/currency-schema';
 import { complain } from '#shared/problems/complaints-of';
 import { identifier, line, optionalEmailAddress, optionalLine, version } from '#shared/problems/entry-schema';
@@ -42,7 +43,7 @@ export const workshopSettingsSchema = z.strictObject({
   telephone: optionalLine(40),
   email: optionalEmailAddress,
   taxRegistration: optionalLine(40),
-  defaultTaxCategory: z.enum(taxCategories),
+  defaultTaxCategory: z.enum(taxCodes),
 });
 
 /** The settings as they are read: with their version, and whether there is a letterhead. */

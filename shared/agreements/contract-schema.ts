@@ -1,6 +1,6 @@
 import * as z from 'zod';
 import type { Contract, ContractPart } from '#shared/agreements/contract';
-import { taxCodes } from '#shared/money/tax-by-category';
+import { taxCodes } from '#shared/money/tax-codes';
 
 const minor = z.int();
 const share = z.union([z.string(), z.number()]);

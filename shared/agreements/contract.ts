@@ -1,6 +1,7 @@
 import type { StagePlan } from '#shared/money/stage-payments';
 import type { MinorUnits } from '#shared/money/decimal';
-import type { TaxCode, TaxedNet } from '#shared/money/tax-by-category';
+import type { TaxedNet } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 import type { Choice } from '#shared/estimates/draft';
 
 /** Why nothing is charged under a category, in the words that were frozen with the issue. */

@@ -1,6 +1,6 @@
 import * as z from 'zod';
 import { workKinds } from '#shared/estimates/price/work-kind';
-import { taxCodes } from '#shared/money/tax-by-category';
+import { taxCodes } from '#shared/money/tax-codes';
 import { reasonSchema } from '#shared/words/reason-schema';
 
 const minor = z.int();

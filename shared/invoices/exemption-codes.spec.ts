@@ -1,5 +1,5 @@
 import { exemptionCodes, exemptionCodesOf } from '#shared/invoices/exemption-codes';
-import { explainedCodes } from '#shared/invoices/exemption-of';
+import { explainedCodes } from '#shared/money/tax-codes';
 import { invoiceContentSchema } from '#shared/invoices/invoice-schema';
 
 describe('reasons for charging no tax', () => {

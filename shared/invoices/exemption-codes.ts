@@ -1,4 +1,4 @@
-import type { TaxCode } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 
 // The codes of one category each, and those of an exemption (E), which may have many reasons.
 const ofCategory: Partial<Readonly<Record<TaxCode, readonly string[]>>> = {

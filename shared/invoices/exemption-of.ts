@@ -1,8 +1,5 @@
 import type { Exemption } from '#shared/invoices/invoice';
-import type { TaxCode } from '#shared/money/tax-by-category';
-
-/** Categories that have to say why nothing is charged (EN 16931, BR-E-10, BR-AE-10, BR-IC-10, BR-G-10, BR-O-10). */
-export const explainedCodes: readonly TaxCode[] = ['E', 'AE', 'K', 'G', 'O'];
+import { explainedCodes, type TaxCode } from '#shared/money/tax-codes';
 
 /** Codes of the VATEX list (EN 16931 code lists) for the categories that have one reason only; an exemption has many. */
 const ownCodes: Partial<Readonly<Record<TaxCode, string>>> = {

@@ -3,7 +3,7 @@ import { invoiceFindings } from '#shared/invoices/invoice-findings';
 import type { InvoiceInHand } from '#shared/invoices/invoice-in-hand';
 import type { InvoiceLine } from '#shared/invoices/invoice-lines';
 import { workedInvoice } from '#shared/invoices/worked-invoice';
-import type { TaxCode } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 
 const line = (code: TaxCode, percent = '0', quantity = '1'): InvoiceLine => ({
   ...{ id: `${code}-${percent}`, name: 'Gilding', description: '', quantity, unit: 'C62', price: '100' },

@@ -3,7 +3,7 @@ import { exemptionCodes } from '#shared/invoices/exemption-codes';
 import { invoiceKinds, type InvoiceContent } from '#shared/invoices/invoice';
 import { vatId } from '#shared/invoices/invoice-settings-schema';
 import { unitCodes } from '#shared/invoices/unit-code';
-import { taxCodes } from '#shared/money/tax-by-category';
+import { taxCodes } from '#shared/money/tax-codes';
 import { decimalEntry, decimalPercentEntry, itemList, positiveDecimalEntry } from '#shared/problems/card-entry-schema';
 import { complain } from '#shared/problems/complaints-of';
 import { day, identifier, line, optionalEmailAddress, optionalLine, paragraphs } from '#shared/problems/entry-schema';

@@ -2,7 +2,7 @@ import type { SnapshotWorkshop } from '#shared/estimates/snapshot';
 import type { DocumentAllowanceOrCharge, InvoiceLine } from '#shared/invoices/invoice-lines';
 import type { InvoiceTotals } from '#shared/invoices/invoice-totals';
 import type { MinorUnits } from '#shared/money/decimal';
-import type { TaxCode } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 
 /** A corrective paper is always a credit note: an issued invoice is never changed. */
 export const invoiceKinds = ['invoice', 'credit-note'] as const;

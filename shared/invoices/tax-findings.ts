@@ -1,6 +1,6 @@
-import { exemptionOf, explainedCodes } from '#shared/invoices/exemption-of';
+import { exemptionOf } from '#shared/invoices/exemption-of';
 import { when, type InvoiceInHand } from '#shared/invoices/invoice-in-hand';
-import type { TaxCode } from '#shared/money/tax-by-category';
+import { explainedCodes, type TaxCode } from '#shared/money/tax-codes';
 import type { Finding } from '#shared/words/finding';
 
 /** Categories under which the seller has to have a tax number of one kind or other (BR-S-02, BR-Z-02, BR-E-02, BR-AE-02, BR-AF-02 …). */

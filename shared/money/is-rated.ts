@@ -1,4 +1,4 @@
-import type { TaxCode } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 
 const rated: readonly TaxCode[] = ['S', 'L', 'M', 'B'];
 

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
-import { taxByCategory, type TaxCode } from '#shared/money/tax-by-category';
+import { taxByCategory } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 
 const taxed = (code: TaxCode, percent: string, net_minor: number) => ({ tax: { code, percent }, net_minor });
 

@@ -1,10 +1,8 @@
 import { D, type DecimalText, type MinorUnits } from '#shared/money/decimal';
+import { isRated } from '#shared/money/is-rated';
 import { roundMinor } from '#shared/money/round-minor';
 import { sumMinor } from '#shared/money/sum-minor';
-
-/** Codes of tax categories as EN 16931 admits them (UNCL 5305, its rule BR-CL-17). */
-export const taxCodes = ['S', 'Z', 'E', 'AE', 'K', 'G', 'O', 'L', 'M', 'B'] as const;
-export type TaxCode = (typeof taxCodes)[number];
+import type { TaxCode } from '#shared/money/tax-codes';
 
 /** What decides the tax of an amount: the category's code and its rate in percent. */
 export interface TaxRate {
@@ -32,18 +30,16 @@ export interface TaxBreakdown {
   readonly gross_minor: MinorUnits;
 }
 
-const untaxed: ReadonlySet<TaxCode> = new Set(['Z', 'E', 'AE', 'K', 'G', 'O']);
-
 /** The rate as it is written: nothing where the category charges no tax, whatever was entered (EN 16931, BR-AE-05 and its like). */
-export const ratePercent = (tax: TaxRate): DecimalText => (untaxed.has(tax.code) ? '0' : tax.percent);
+export const ratePercent = (tax: TaxRate): DecimalText => (isRated(tax.code) ? tax.percent : '0');
 
 /** Two rates are one category when code and rate agree, however the rate is written (25, 25.0); null where a rate plays no part. */
 export const taxKey = (tax: TaxRate): string =>
-  untaxed.has(tax.code) ? tax.code : `${tax.code} ${new D(tax.percent).toString()}`;
+  isRated(tax.code) ? `${tax.code} ${new D(tax.percent).toString()}` : tax.code;
 
 /** Tax on the sum of one category, half up to the minor unit; 0 for Z, E, AE, K, G, O (EN 16931, BR-CO-17, BR-Z/E/AE/IC/G/O-09). */
 export const taxOn = (net_minor: MinorUnits, tax: TaxRate): MinorUnits =>
-  untaxed.has(tax.code) ? 0 : roundMinor(new D(net_minor).times(tax.percent).div(100));
+  isRated(tax.code) ? roundMinor(new D(net_minor).times(tax.percent).div(100)) : 0;
 
 /**
  * Sums first, then taxes once per category and rate, in order of first appearance; whole minor units, RangeError beyond safe

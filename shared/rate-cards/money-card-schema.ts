@@ -1,5 +1,6 @@
 import * as z from 'zod';
 import { isRated } from '#shared/money/is-rated';
+import { explainedCodes, taxCodes } from '#shared/money/tax-codes';
 import {
   cardItemId,
   cardItemName,
@@ -9,24 +10,15 @@ import {
   itemList,
 } from '#shared/problems/card-entry-schema';
 import { complain } from '#shared/problems/complaints-of';
-import {
-  taxCodes,
-  type MoneyCard,
-  type PaymentStage,
-  type TaxCategory,
-  type TaxCode,
-} from '#shared/rate-cards/money-card';
+import type { MoneyCard, PaymentStage, TaxCategory } from '#shared/rate-cards/money-card';
 
 const gradeSchema = z.strictObject({ id: cardItemId, name: cardItemName, costPerHour: decimalEntry });
-
-/** Categories that have to say why nothing is charged (EN 16931, BR-E-10, BR-AE-10, BR-IC-10, BR-G-10, BR-O-10). */
-const explained: readonly TaxCode[] = ['E', 'AE', 'K', 'G', 'O'];
 
 /** Who has a rate charges it, all others charge none (EN 16931, BR-S-05, BR-Z/E/AE/IC/G/O-09). */
 const rateFits = ({ code, percent }: TaxCategory): boolean =>
   code === 'S' ? Number(percent) > 0 : isRated(code) || Number(percent) === 0;
 const reasonFits = ({ code, exemptionReason }: TaxCategory): boolean =>
-  explained.includes(code) === (exemptionReason !== '');
+  explainedCodes.includes(code) === (exemptionReason !== '');
 
 const taxCategorySchema = z
   .strictObject({

@@ -1,4 +1,5 @@
 import type { DecimalText } from '#shared/money/decimal';
+import type { TaxCode } from '#shared/money/tax-codes';
 
 /** A grade of hand: what an hour of theirs costs the workshop. */
 export interface Grade {
@@ -6,10 +7,6 @@ export interface Grade {
   readonly name: string;
   readonly costPerHour: DecimalText;
 }
-
-/** Codes of tax categories of EN 16931 (UNCL 5305 as it restricts it). */
-export const taxCodes = ['S', 'Z', 'E', 'AE', 'K', 'G', 'O', 'L', 'M'] as const;
-export type TaxCode = (typeof taxCodes)[number];
 
 export interface TaxCategory {
   readonly id: string;

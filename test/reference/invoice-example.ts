@@ -1,7 +1,7 @@
 import examples from './invoice-examples.json';
 import type { InvoiceAmounts } from '#shared/invoices/invoice-totals';
 import { minorOf } from '#shared/money/minor-of';
-import type { TaxCode } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 
 interface ExampleAllowance {
   readonly charge: boolean;

@@ -12,7 +12,8 @@ import { percentOf } from '#shared/money/percent-of';
 import { splitByLargestRemainder } from '#shared/money/split-by-largest-remainder';
 import { stagePayments } from '#shared/money/stage-payments';
 import { sumMinor } from '#shared/money/sum-minor';
-import { taxByCategory, type TaxCode, type TaxableAmount } from '#shared/money/tax-by-category';
+import { taxByCategory, type TaxableAmount } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 import { textOf } from '#shared/money/text-of';
 
 describe('mark-up and margin', () => {

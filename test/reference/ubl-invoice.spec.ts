@@ -8,7 +8,7 @@ import type { FrozenInvoice } from '#shared/invoices/invoice';
 import type { InvoiceLine } from '#shared/invoices/invoice-lines';
 import { invoiceTotals } from '#shared/invoices/invoice-totals';
 import { currencyDigits } from '#shared/money/currency-digits';
-import type { TaxCode } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 import { exampleAmounts, invoiceExamples, type InvoiceExample } from './invoice-example';
 import { textAt, ublFaults, ublRoot } from './ubl-check';
 

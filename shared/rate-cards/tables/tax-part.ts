@@ -1,4 +1,4 @@
-import { taxCodes } from '#shared/rate-cards/money-card';
+import { taxCodes } from '#shared/money/tax-codes';
 import { choicesOf } from '#shared/rate-cards/tables/choices-of';
 import type { CardPart } from '#shared/rate-cards/tables/card-table';
 import { choiceColumn, decimalColumn, itemColumn, nameColumn, textColumn } from '#shared/rate-cards/tables/columns';

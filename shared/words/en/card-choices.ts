@@ -154,6 +154,7 @@ export const cardChoices = {
   'card-tax-code-o': 'outside the scope (O)',
   'card-tax-code-l': 'Canary Islands (L)',
   'card-tax-code-m': 'Ceuta and Melilla (M)',
+  'card-tax-code-b': 'split payment, Italy (B)',
   'card-yes': 'yes',
   'card-no': 'no',
 } as const;

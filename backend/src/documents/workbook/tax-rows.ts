@@ -1,4 +1,5 @@
 import type { PriceTax } from '#shared/estimates/price/price';
+import { isRated } from '#shared/money/is-rated';
 import { splitByLargestRemainder } from '#shared/money/split-by-largest-remainder';
 import { sumMinor } from '#shared/money/sum-minor';
 import { linePlace } from './price-columns';
@@ -24,8 +25,6 @@ interface TaxFigures {
   readonly remainder: number;
   readonly part_minor: number;
 }
-
-const untaxed = new Set(['Z', 'E', 'AE', 'K', 'G', 'O']);
 
 /** Columns of the table, from the first of hours on. */
 const heads = ['lines', 'exact', 'remainder', 'part', 'taxed'] as const;
@@ -88,7 +87,7 @@ function linesFormula({ sheet, columns, facts }: PricePage, place: TaxPlace, num
 }
 
 function taxFormula({ facts, money }: PricePage, tax: PriceTax, at: { place: number; taxed: string }): string {
-  if (untaxed.has(tax.tax.code)) return '0';
+  if (!isRated(tax.tax.code)) return '0';
   return roundedAmount(`${at.taxed}*${money.taxes[at.place]}/100`, facts.price.digits);
 }
 

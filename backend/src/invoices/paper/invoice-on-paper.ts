@@ -4,7 +4,8 @@ import type { AllowanceOrCharge } from '#shared/invoices/invoice-lines';
 import { allowanceAmount } from '#shared/invoices/invoice-totals';
 import { currencyDigits } from '#shared/money/currency-digits';
 import { D, type MinorUnits } from '#shared/money/decimal';
-import { ratePercent, type TaxCode, type TaxRate } from '#shared/money/tax-by-category';
+import { ratePercent, type TaxRate } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 import { textStyles, type PaperWords, type TableColumn, type TableRow } from '../../documents';
 
 /** An issued invoice and the words its paper is set in. */

@@ -1,8 +1,8 @@
 import { ChangeDetectionStrategy, Component, inject, input, type OnInit } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
-import { taxCategories } from '#shared/accounts/workshop-options';
 import { workshopSettingsSchema, type Workshop } from '#shared/accounts/workshop-schema';
+import { taxCodeChoices } from '../core/formats/tax-code-names';
 import { schemaForm } from '../core/forms/schema-form';
 import { Notices } from '../core/problems/notices';
 import { Entry } from '../ui/field/entry';
@@ -10,7 +10,6 @@ import { Field } from '../ui/field/field';
 import { FormComplaint } from '../ui/field/form-complaint';
 import { LinesEntry } from '../ui/field/lines-entry';
 import { HabitFields } from './habit-fields';
-import { taxNames } from './tax-names';
 import { WorkshopStore } from './workshop-store';
 
 type Settings = Omit<Workshop, 'id' | 'version' | 'logoFileId'>;
@@ -48,7 +47,7 @@ export class WorkshopForm implements OnInit {
 
   protected readonly form = schemaForm(workshopSettingsSchema, nothing);
   protected readonly message = (name: string): string => this.form.message(name);
-  protected readonly categories = taxCategories.map((value) => ({ value, label: `${value}, ${taxNames[value]}` }));
+  protected readonly categories = taxCodeChoices.map(({ value, label }) => ({ value, label: `${value}, ${label}` }));
 
   ngOnInit(): void {
     this.form.reset(settingsOf(this.workshop()));

@@ -5,7 +5,7 @@ import { readAcceptedPaper } from '#shared/agreements/agreement-endpoints';
 import type { Job } from '#shared/jobs/job-schema';
 import { addressOf } from '../core/api/address-of';
 import { Formats } from '../core/formats/formats';
-import { grossText } from '../core/formats/price-text';
+import { grossText } from '../core/formats/net-and-gross-text';
 import { newId } from '../core/new-id';
 import { Notices } from '../core/problems/notices';
 import { ProblemError } from '../core/problems/problem-error';

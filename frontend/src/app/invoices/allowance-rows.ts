@@ -11,7 +11,7 @@ import { AmountField } from '../ui/field/amount-field';
 import { DecimalField } from '../ui/field/decimal-field';
 import { EntryAt } from '../ui/field/entry-at';
 import { Icon } from '../ui/icon/icon';
-import { taxCodeChoices } from './tax-code-names';
+import { taxCodeChoices } from '../core/formats/tax-code-names';
 import { firstTax } from './first-tax';
 
 /** What comes off or on, of a line or of the whole: a fixed amount, or a share of what it is taken from. */

@@ -4,14 +4,14 @@ import { MatButton, MatIconButton } from '@angular/material/button';
 import type { InvoiceContent } from '#shared/invoices/invoice';
 import type { MinorUnits } from '#shared/money/decimal';
 import { isRated } from '#shared/money/is-rated';
-import type { TaxCode } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 import type { AnyDocumentForm } from '../core/forms/document-form';
 import { Formats } from '../core/formats/formats';
 import { DecimalField } from '../ui/field/decimal-field';
 import { EntryAt } from '../ui/field/entry-at';
 import { Icon } from '../ui/icon/icon';
 import { AllowanceRows } from './allowance-rows';
-import { taxCodeChoices, taxCodeNames } from './tax-code-names';
+import { taxCodeChoices, taxCodeNames } from '../core/formats/tax-code-names';
 import { unitChoices } from './unit-choices';
 
 /** One line of a draft: what, how much of it, at which price, under which tax; its amount follows. */

@@ -1,11 +1,11 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
-import type { TaxCode } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 import type { AnyDocumentForm } from '../core/forms/document-form';
 import { Entry } from '../ui/field/entry';
 import { EntryAt } from '../ui/field/entry-at';
 import { Field } from '../ui/field/field';
 import { exemptionChoices, exemptionCodeOf, exemptionNames } from './exemption-names';
-import { taxCodeNames } from './tax-code-names';
+import { taxCodeNames } from '../core/formats/tax-code-names';
 
 /** Why a category charges no tax: in words for the paper, and by a code of the list VATEX, found by typing what it is about. */
 @Component({

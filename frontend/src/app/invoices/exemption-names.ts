@@ -1,5 +1,5 @@
 import { exemptionCodesOf } from '#shared/invoices/exemption-codes';
-import type { TaxCode } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 
 /** What the codes of the list VATEX stand for, in short; articles are of Council Directive 2006/112/EC unless another law is named. */
 export const exemptionNames: Readonly<Record<string, string>> = {

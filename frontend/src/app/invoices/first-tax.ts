@@ -1,5 +1,5 @@
 import { isRated } from '#shared/money/is-rated';
-import type { TaxCode } from '#shared/money/tax-by-category';
+import type { TaxCode } from '#shared/money/tax-codes';
 import type { Session } from '../core/session/session';
 
 /** The tax a first line begins with: as the workshop usually works, with its rate still to be entered. */

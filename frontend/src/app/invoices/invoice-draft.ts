@@ -3,7 +3,7 @@ import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { Router, RouterLink } from '@angular/router';
-import { explainedCodes } from '#shared/invoices/exemption-of';
+import { explainedCodes } from '#shared/money/tax-codes';
 import type { InvoiceContent } from '#shared/invoices/invoice';
 import { invoiceContentSchema, type Invoice } from '#shared/invoices/invoice-schema';
 import { countryChoices } from '../accounts';

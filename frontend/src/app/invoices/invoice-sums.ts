@@ -4,7 +4,7 @@ import { isRated } from '#shared/money/is-rated';
 import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
 import type { InvoiceAmounts } from './draft-amounts';
-import { taxCodeNames } from './tax-code-names';
+import { taxCodeNames } from '../core/formats/tax-code-names';
 
 /** What an invoice comes to: net, tax by category, gross, and what is to be paid of it. */
 @Component({

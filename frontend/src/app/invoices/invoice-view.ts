@@ -19,7 +19,7 @@ import { InvoiceCalls } from './invoice-calls';
 import { InvoiceRelated } from './invoice-related';
 import { InvoiceSums } from './invoice-sums';
 import { NotedLetterForm } from './noted-letter-form';
-import { taxCodeNames } from './tax-code-names';
+import { taxCodeNames } from '../core/formats/tax-code-names';
 import { WriteOffForm } from './write-off-form';
 
 const paperNames: Readonly<Record<InvoicePaper, string>> = {

@@ -2,7 +2,7 @@ import { NgTemplateOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, input, resource } from '@angular/core';
 import { sumMinor } from '#shared/money/sum-minor';
 import { Formats } from '../../core/formats/formats';
-import { netAndGrossText } from '../../core/formats/price-text';
+import { netAndGrossText } from '../../core/formats/net-and-gross-text';
 import { EstimateStore } from '../estimate-store';
 import { PartList } from '../parts/part-list';
 import { PartPlace } from '../parts/part-place';

@@ -4,7 +4,7 @@ import { MatButton } from '@angular/material/button';
 import type { CostedEstimate } from '#shared/estimates/estimate-schema';
 import type { PricedIssueSummary } from '#shared/estimates/issue-schema';
 import { Formats } from '../../core/formats/formats';
-import { netAndGrossText } from '../../core/formats/price-text';
+import { netAndGrossText } from '../../core/formats/net-and-gross-text';
 import { EmptyState } from '../../ui/page/empty-state';
 import { LaterWidget } from '../../ui/page/later-widget';
 import { Skeleton } from '../../ui/page/skeleton';

@@ -1,5 +1,6 @@
-import { taxCodes, type TaxCode } from '#shared/money/tax-by-category';
+import { taxCodes, type TaxCode } from '#shared/money/tax-codes';
 
+/** How the tax categories read to somebody who has to choose one. */
 export const taxCodeNames: Readonly<Record<TaxCode, string>> = {
   S: $localize`Standard or reduced rate`,
   Z: $localize`Zero rated`,
@@ -13,5 +14,5 @@ export const taxCodeNames: Readonly<Record<TaxCode, string>> = {
   B: $localize`Split payment (Italy)`,
 };
 
-/** How a line may be taxed. */
+/** What may be chosen where tax is. */
 export const taxCodeChoices = taxCodes.map((value) => ({ value, label: taxCodeNames[value] }));

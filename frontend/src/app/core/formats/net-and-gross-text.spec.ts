@@ -1,5 +1,5 @@
 import type { Formats } from './formats';
-import { grossText, netAndGrossText } from './price-text';
+import { grossText, netAndGrossText } from './net-and-gross-text';
 
 const formats = { money: (minor: number) => `€${minor / 100}` } as Formats;
 const taxed = { net_minor: 10000, tax_minor: 2300, gross_minor: 12300 };
