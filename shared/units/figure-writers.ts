@@ -4,6 +4,7 @@ import { squareMillimetresPerSquareFoot, squareMillimetresPerSquareInch } from '
 import { lengthFigure } from '#shared/units/format-length';
 import { inMetric } from '#shared/units/metric';
 import type { Pen } from '#shared/units/pen';
+import { inTemperatureUnit, temperatureUnit } from '#shared/units/temperature-unit';
 import { trueMinus } from '#shared/units/true-minus';
 import type { WordCode } from '#shared/words/word-code';
 
@@ -94,6 +95,13 @@ const volumeWriter = ({ worded }: Pen): Write => {
       : worded('unit-litres', volume, 2);
 };
 
+function temperatureWriter({ settings: { locale, lengthUnit }, worded }: Pen): Write {
+  return (temperature_celsius) => {
+    const unit = temperatureUnit(locale, lengthUnit);
+    return worded(`unit-${unit}`, inTemperatureUnit(temperature_celsius, unit), 1);
+  };
+}
+
 /** How each unit a figure can carry is written with a reader's pen, by the ending of the value's name. */
 export function figureWriters(pen: Pen): Readonly<Record<string, Write>> {
   const { worded, number, withUnit, settings } = pen;
@@ -106,7 +114,7 @@ export function figureWriters(pen: Pen): Readonly<Record<string, Write>> {
     hours: (figure) => worded('unit-hours', figure, 2),
     minutes: durationWriter(pen),
     days: (figure) => worded('unit-whole-days', figure, 1),
-    celsius: (figure) => worded('unit-celsius', figure, 1),
+    celsius: temperatureWriter(pen),
     µm: (figure) => worded('unit-micrometres', figure, 3),
     grams: massWriter(pen),
     litres: volumeWriter(pen),

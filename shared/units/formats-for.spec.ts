@@ -72,6 +72,8 @@ describe('figures as a reader wants them', () => {
   });
 
   it.each([
+    ['celsius', 20, '68 °F'],
+    ['celsius', -40, '−40 °F'],
     ['mm', 860.425, '33 7/8 in'],
     ['mm', 860, '≈ 33 27/32 in'],
     ['mm', 25.4, '1 in'],

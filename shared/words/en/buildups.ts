@@ -51,7 +51,7 @@ export const buildups = {
     '{steps}: rags wet with oil heat up by themselves and can catch fire. Spread them out to dry or keep them under water in a lidded tin.',
   'caution-glue-allergy':
     '{steps}: animal glue can cause allergy of skin and breath. Gloves, and no breathing in of the powder.',
-  'caution-glue-heat': '{steps}: never let glue pass 55\u00a0°C. It loses its strength.',
+  'caution-glue-heat': '{steps}: never let glue pass 55\u00a0°C (131\u00a0°F). It loses its strength.',
   'caution-lifting':
     '{what}: heavy or unwieldy. Lift with two or more, or with a trolley or hoist, and clear the way first; carry by the carcase, never by the carving.',
   'caution-top-on-base':

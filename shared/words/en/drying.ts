@@ -1,6 +1,6 @@
 export const drying = {
   'drying-factor-water':
-    'Drying in water at {temperature_celsius} and {humidity_percent}: {factor, number} times as long as at 20\u00a0°C and 50\u00a0%, by how much moisture the air can still take up.',
+    'Drying in water at {temperature_celsius} and {humidity_percent}: {factor, number} times as long as at 20\u00a0°C (68\u00a0°F) and 50\u00a0%, by how much moisture the air can still take up.',
   'drying-factor-oil':
     'Drying of oil at {temperature_celsius} and {humidity_percent}: {warmth, number} for the warmth × {damp, number} for the damp.',
   'drying-factor-spirit': 'Spirit goes off at its own pace: shop air is not counted.',
@@ -9,7 +9,7 @@ export const drying = {
   'drying-too-damp':
     'At {humidity_percent} relative humidity nothing dries soundly. Dry the air below 95\u00a0% first.',
   'drying-too-cold':
-    'At {temperature_celsius} nothing made with water sets soundly. Warm the room to 5\u00a0°C at least.',
+    'At {temperature_celsius} nothing made with water sets soundly. Warm the room to 5\u00a0°C (41\u00a0°F) at least.',
   'drying-moisture':
     'At {temperature_celsius} and {humidity_percent} wood comes to rest at {moisture_percent} moisture.',
   'drying-movement': '{width_mm} wide × {coefficient, number, ::.00000} × {points, number} points of moisture.',

@@ -15,6 +15,7 @@ export const units = {
   'unit-days': '{figure} d',
   'unit-whole-days': '{count, plural, one {{figure} day} other {{figure} days}}',
   'unit-celsius': '{figure} °C',
+  'unit-fahrenheit': '{figure} °F',
   'unit-factor': '× {figure}',
   'unit-divisor': '÷ {figure}',
   'unit-leaves': '{count, plural, one {{figure} leaf} other {{figure} leaves}}',

@@ -6,6 +6,7 @@ import { formatDecimal } from '#shared/units/format-decimal';
 import { formatLength } from '#shared/units/format-length';
 import { formatsFor } from '#shared/units/formats-for';
 import { roughLength } from '#shared/units/rough-length';
+import { celsiusOf, inTemperatureUnit, temperatureUnit } from '#shared/units/temperature-unit';
 import { trueMinus } from '#shared/units/true-minus';
 import { Session } from '../session/session';
 import { CATALOGUE } from './catalogue';
@@ -26,6 +27,8 @@ export class Formats {
   /** The workshop's, or that of the page's own subject. */
   readonly currency = computed(() => this.shown() ?? this.reader().currency);
   readonly lengthUnit = computed(() => this.reader().lengthUnit);
+  readonly temperatureUnit = computed(() => temperatureUnit(this.locale(), this.lengthUnit()));
+  readonly temperatureSign = computed(() => (this.temperatureUnit() === 'celsius' ? '°C' : '°F'));
   readonly timeZone = computed(() => this.reader().timeZone);
   readonly currencyDigits = computed(() => currencyDigits(this.currency()));
   readonly currencySign = computed(() => signOf(this.locale(), this.currency()));
@@ -118,6 +121,15 @@ export class Formats {
   /** A number as somebody here would type it: ungrouped, with the locale's decimal sign. */
   typed(figure: number): string {
     return Number.isFinite(figure) ? formatDecimal(String(figure), this.locale()) : '';
+  }
+
+  /** A temperature in the degrees of somebody here, and back. */
+  degrees(temperature_celsius: number): number {
+    return inTemperatureUnit(temperature_celsius, this.temperatureUnit());
+  }
+
+  celsius(degrees: number): number {
+    return celsiusOf(degrees, this.temperatureUnit());
   }
 
   /** A length in the unit it was not typed in (the workshop’s own where the text names none), for a reading marked ≈ beside it. */

@@ -8,6 +8,7 @@ import { Formats } from '../../core/formats/formats';
 import { Entry } from '../../ui/field/entry';
 import { Field } from '../../ui/field/field';
 import { NumberField } from '../../ui/field/number-field';
+import { TemperatureField } from '../../ui/field/temperature-field';
 import type { Explained } from '../../ui/figure/explained';
 import { Figure } from '../../ui/figure/figure';
 import { FindingList } from '../../ui/page/finding-list';
@@ -35,7 +36,7 @@ const blank = { temperature_celsius: null, humidity_percent: null };
 /** The air of the shop and of the place the piece is for, and how much longer or quicker things dry in the shop. */
 @Component({
   selector: 'app-air-form',
-  imports: [Entry, Field, Figure, FindingList, NumberField, ReactiveFormsModule],
+  imports: [Entry, Field, Figure, FindingList, NumberField, ReactiveFormsModule, TemperatureField],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './air-form.html',
   styleUrl: './air-form.scss',

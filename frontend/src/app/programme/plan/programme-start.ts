@@ -7,13 +7,14 @@ import { Entry } from '../../ui/field/entry';
 import { Field } from '../../ui/field/field';
 import { FormComplaint } from '../../ui/field/form-complaint';
 import { NumberField } from '../../ui/field/number-field';
+import { TemperatureField } from '../../ui/field/temperature-field';
 import { ProgrammeStore } from './programme-store';
 import { startEntries, startFormSchema, startInputsOf } from './start-form';
 
 /** From when or by when it is planned, the days kept in hand, and the air. */
 @Component({
   selector: 'app-programme-start',
-  imports: [Entry, Field, FormComplaint, MatButton, NumberField, ReactiveFormsModule],
+  imports: [Entry, Field, FormComplaint, MatButton, NumberField, ReactiveFormsModule, TemperatureField],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     <form [formGroup]="form.group" (ngSubmit)="keep()">
@@ -40,11 +41,10 @@ import { startEntries, startFormSchema, startInputsOf } from './start-form';
         </select>
       </app-field>
       @if (entered()?.hasOwnAir) {
-        <app-number-field
+        <app-temperature-field
           class="short"
           i18n-label
           label="Temperature"
-          unit="°C"
           formControlName="temperature_celsius"
           [complaint]="form.message('temperature_celsius')"
         />

@@ -34,7 +34,7 @@ const day_ms = 86_400_000;
 })
 export class WhatIfPanel {
   private readonly store = inject(ProgrammeStore);
-  private readonly formats = inject(Formats);
+  protected readonly formats = inject(Formats);
   private readonly words = inject(Words);
   protected readonly comparison = inject(WhatIfComparison);
 

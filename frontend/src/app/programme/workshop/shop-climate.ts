@@ -19,7 +19,7 @@ const begin: Climate = { temperature_celsius: 20, humidity_percent: 50 };
         <thead>
           <tr>
             <th scope="col" i18n>Month</th>
-            <th scope="col" i18n>Temperature, °C</th>
+            <th scope="col">{{ warmth }}, {{ formats.temperatureSign() }}</th>
             <th scope="col" i18n>Humidity, %</th>
           </tr>
         </thead>
@@ -34,8 +34,8 @@ const begin: Climate = { temperature_celsius: 20, humidity_percent: 50 };
                   type="number"
                   [attr.aria-label]="warmth + ', ' + month.name"
                   [attr.aria-invalid]="month.wrong || null"
-                  [value]="month.air.temperature_celsius"
-                  (change)="change(at, { temperature_celsius: degrees.valueAsNumber })"
+                  [value]="formats.degrees(month.air.temperature_celsius)"
+                  (change)="change(at, { temperature_celsius: formats.celsius(degrees.valueAsNumber) })"
                 />
               </td>
               <td>
@@ -103,7 +103,7 @@ const begin: Climate = { temperature_celsius: 20, humidity_percent: 50 };
   `,
 })
 export class ShopClimate {
-  private readonly formats = inject(Formats);
+  protected readonly formats = inject(Formats);
   protected readonly store = inject(ShopStore);
 
   protected readonly warmth = $localize`Temperature`;

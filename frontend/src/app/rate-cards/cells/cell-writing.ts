@@ -48,6 +48,7 @@ export class CellWriting {
   unit({ unit }: CardColumn): string {
     if (unit === undefined || unit === 'minutes') return '';
     if (unit === 'money') return this.formats.currencySign();
+    if (unit === 'celsius') return this.formats.temperatureSign();
     return unit === 'mm' ? this.formats.lengthUnit() : this.words.say(`card-unit-${unit}`);
   }
 
@@ -123,6 +124,7 @@ export class CellWriting {
 
   private numberText({ unit }: CardColumn, figure: number): string {
     if (unit === 'minutes') return durationText(figure, (one) => this.formats.typed(one));
+    if (unit === 'celsius') return this.formats.typed(this.formats.degrees(figure));
     if (unit !== 'mm') return this.formats.typed(figure);
     const length = lengthFigure(figure, this.formats.lengthUnit(), this.formats.locale());
     // A length that the workshop's unit cannot say exactly is written in full, so that it is not changed by being read back.
@@ -152,6 +154,7 @@ export class CellWriting {
     }
     const read = parseNumber(text.replace(/\s*%\s*$/, ''), locale);
     if (!read.ok) return read;
+    if (unit === 'celsius') return { ok: true, value: this.formats.celsius(read.value) };
     if (kind === 'decimal') return { ok: true, value: read.decimal };
     return { ok: true, value: kind === 'hundredths' ? Number((read.value * 100).toFixed(6)) : read.value };
   }

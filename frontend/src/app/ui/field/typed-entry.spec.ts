@@ -6,6 +6,7 @@ import { DecimalField } from './decimal-field';
 import { LengthField } from './length-field';
 import { NumberField } from './number-field';
 import { PercentField } from './percent-field';
+import { TemperatureField } from './temperature-field';
 
 @Component({
   selector: 'app-test-length',
@@ -46,6 +47,16 @@ class TestPercent {
 })
 class TestDecimal {
   readonly control = new FormControl<string | null>('');
+}
+
+@Component({
+  selector: 'app-test-temperature',
+  imports: [TemperatureField, ReactiveFormsModule],
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  template: `<app-temperature-field i18n-label label="Air" [formControl]="control" />`,
+})
+class TestTemperature {
+  readonly control = new FormControl<number | null>(null);
 }
 
 describe('The fields for figures', () => {
@@ -131,6 +142,25 @@ describe('The fields for figures', () => {
     control.setValue('2310.70');
     await fixture.whenStable();
     expect([entry.value, element.textContent?.includes('€')]).toEqual(['2310,70', true]);
+  });
+
+  it('take a temperature in the degrees of the workshop and keep it in °C', async () => {
+    signIn(['owner'], { locale: 'en-US', lengthUnit: 'in' });
+    const { control, type, entry, element, fixture } = await open(TestTemperature);
+    await type('68');
+    expect(control.value).toBe(20);
+    await type('warm');
+    expect(control.value).toBeNaN();
+    control.setValue(10);
+    await fixture.whenStable();
+    expect([entry.value, element.textContent?.includes('°F')]).toEqual(['50', true]);
+  });
+
+  it('take a temperature in °C where nobody knows another', async () => {
+    signIn();
+    const { control, type, element } = await open(TestTemperature);
+    await type('18.5');
+    expect([control.value, element.textContent?.includes('°C')]).toEqual([18.5, true]);
   });
 
   it('tie the entry to its label and to what is wrong with it', async () => {
