@@ -1,5 +1,6 @@
 import type { LeafProduct } from '#shared/leaf/leaf-product';
 import { D, type DecimalText } from '#shared/money/decimal';
+import { TooLarge } from '#shared/money/too-large';
 
 /** So many whole packs of a size in booklets. */
 export interface BoughtPack {
@@ -63,13 +64,13 @@ function cheapestUpTo(product: LeafProduct, most: number): Cheapest[] {
 const mostBooklets = 20_000;
 
 function refuseUnlessCountable(booklets: number): void {
-  if (!Number.isInteger(booklets) || booklets < 0 || booklets > mostBooklets)
-    throw new RangeError('booklets are whole, at most 20,000');
+  if (booklets > mostBooklets) throw new TooLarge('booklets are at most 20,000');
+  if (!Number.isInteger(booklets) || booklets < 0) throw new RangeError('booklets are whole and not negative');
 }
 
 /**
  * The cheapest mix of packs (at their break) and single booklets (at list) that covers a need of whole booklets, ties to more leaf.
- * Throws a RangeError unless the need is a whole number up to 20,000.
+ * Throws a RangeError unless the need is a whole number, TooLarge (one, too) above 20,000.
  */
 export function leafPurchase(product: LeafProduct, booklets: number): LeafPurchase {
   refuseUnlessCountable(booklets);

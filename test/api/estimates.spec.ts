@@ -67,6 +67,18 @@ describe('keeping a draft', () => {
     expect(stored.figures).toEqual(body.figures);
   });
 
+  it('refuses in words what comes to more than is worked, and keeps nothing of it', async () => {
+    const sample = await sampleEstimate(api.ours);
+    const shape = { kind: 'rectangle', length_mm: 90_000, height_mm: 9_000 } as const;
+    const large = { ...sample.member, count: 10_000, shape, ornaments: [] };
+    const refused = await keep(sample.estimateId, [
+      { kind: 'member', id: sample.memberId, version: 1, content: large },
+    ]);
+    expect([refused.status, (refused.body as { type: string }).type]).toEqual([422, 'urn:problem:estimate-too-large']);
+    const stored = (await read('owner', sample.estimateId)).body as CostedEstimate;
+    expect(stored.members.map(({ version, content }) => [version, content.count])).toEqual([[1, 2]]);
+  });
+
   it('tells the second of two people, and shows both sides', async () => {
     const sample = await sampleEstimate(api.ours);
     await keep(sample.estimateId, [named(sample, 'First', 1)]);

@@ -1,6 +1,6 @@
 import { v7 as newId } from 'uuid';
 import type { Problem } from '#shared/problems/problem-schema';
-import { readEstimate, takeRateCard } from '#shared/estimates/estimates-endpoints';
+import { changeEstimate, readEstimate, takeRateCard } from '#shared/estimates/estimates-endpoints';
 import type { CardDifference } from '#shared/rate-cards/card-differences';
 import type { CardEffectsAnswer } from '#shared/rate-cards/card-effects-schema';
 import type { RateCard } from '#shared/rate-cards/rate-card';
@@ -350,6 +350,22 @@ describe('The effects of a draft on open estimates', () => {
     await workOut(draft.id);
     const effect = (await effectsOf(draft.id)).effects.find((one) => one.estimateId === estimateId);
     expect(effect?.findings).toEqual([expect.objectContaining({ kind: 'missing', code: 'carving-ornament-unknown' })]);
+  });
+
+  it('say of an estimate that it cannot be worked on the new card, and of all others what they come to', async () => {
+    const { estimateId, memberId, member } = await sampleEstimate(api.ours);
+    const forty = { kind: 'member', id: memberId, version: 1, content: { ...member, count: 40 } } as const;
+    await owner.call(changeEstimate, { params: { estimateId }, body: { changes: [forty] } });
+    const draft = await draftCard(api.ours);
+    // Specks of leaf, each bought by itself.
+    const products = draft.content.leaf.products.map((one) => ({ ...one, side_mm: 20, leavesPerBooklet: 1 }));
+    await keep(draft, { ...draft.content, leaf: { ...draft.content.leaf, products } });
+    await workOut(draft.id);
+    const answer = await effectsOf(draft.id);
+    expect(answer.state).toBe('done');
+    const effect = answer.effects.find((one) => one.estimateId === estimateId)!;
+    expect(effect.findings).toEqual([{ kind: 'refuse', code: 'effect-too-large', values: {} }]);
+    expect(effect.after_minor).toBe(effect.before_minor);
   });
 
   it('are old when the draft has changed since', async () => {

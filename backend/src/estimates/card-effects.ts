@@ -4,6 +4,7 @@ import { lineDifferences, type NamedLines } from '#shared/estimates/line-differe
 import type { JobState } from '#shared/jobs/job-schema';
 import type { CardEffect } from '#shared/rate-cards/card-effects';
 import type { RateCard } from '#shared/rate-cards/rate-card';
+import { Rejection } from '#shared/problems/rejection';
 import type { Finding } from '#shared/words/finding';
 import type { Jobs, NamedJobRow } from '../jobs';
 import type { CardEffects, RateCardService } from '../rate-cards';
@@ -40,7 +41,20 @@ interface Compared {
   readonly whole: WholeEstimate;
   readonly job: NamedJobRow;
   readonly before: Figures;
-  readonly after: Figures;
+  /** None where the new card makes them too large to be worked. */
+  readonly after: Figures | undefined;
+}
+
+const tooLarge: Finding = { kind: 'refuse', code: 'effect-too-large', values: {} };
+
+/** One estimate that cannot be worked on the new card keeps nobody from reading of the others. */
+async function figuresIfWorked(working: Promise<Figures>): Promise<Figures | undefined> {
+  try {
+    return await working;
+  } catch (error) {
+    if (error instanceof Rejection && error.code === 'estimate-too-large') return undefined;
+    throw error;
+  }
 }
 
 function effectOf({ whole, job, before, after }: Compared): CardEffect {
@@ -55,9 +69,9 @@ function effectOf({ whole, job, before, after }: Compared): CardEffect {
     jobTitle: job.title,
     currency,
     before_minor: before.price.net_minor,
-    after_minor: after.price.net_minor,
-    lines: lineDifferences(named(before), named(after)),
-    findings: newFindings(before, after),
+    after_minor: (after ?? before).price.net_minor,
+    lines: after ? lineDifferences(named(before), named(after)) : [],
+    findings: after ? newFindings(before, after) : [tooLarge],
   };
 }
 
@@ -95,8 +109,8 @@ export const cardEffects =
     for (const { job, estimateId } of open) {
       const whole = await parts.drafts.whole(workshopId, estimateId);
       const own = await parts.cards.card(workshopId, whole.estimate.rateCardId);
-      const [before, after] = [await figuresOn(own, whole), await figuresOn(content, whole)];
-      effects.push(effectOf({ whole, job, before, after }));
+      const before = await figuresOn(own, whole);
+      effects.push(effectOf({ whole, job, before, after: await figuresIfWorked(figuresOn(content, whole)) }));
       await tell(effects.length, open.length);
       await letOthersIn();
     }

@@ -1,4 +1,5 @@
 import { Worker } from 'node:worker_threads';
+import { TooLarge } from '#shared/money/too-large';
 import { Rejection } from '#shared/problems/rejection';
 import type { ThreadFile } from './thread-file';
 
@@ -8,8 +9,17 @@ interface Waiting<Question, Answer> {
   readonly reject: (error: Error) => void;
 }
 
+interface ThreadFailure {
+  readonly error: string;
+  readonly isTooLarge?: boolean;
+}
+
 /** What a thread sends back: its answer, or why there is none. */
-export type ThreadReply<Answer> = { readonly answer: Answer } | { readonly error: string };
+export type ThreadReply<Answer> = { readonly answer: Answer } | ThreadFailure;
+
+/** An error loses its class on its way out of a thread. */
+const failureOf = ({ error, isTooLarge }: ThreadFailure): Error =>
+  isTooLarge ? new TooLarge(error) : new Error(error);
 
 const mostWaiting = 200;
 const idle_milliseconds = 20_000;
@@ -62,7 +72,7 @@ export class ThreadQueue<Question, Answer> {
     const { running } = this;
     this.running = undefined;
     if ('answer' in reply) running?.resolve(reply.answer);
-    else running?.reject(new Error(reply.error));
+    else running?.reject(failureOf(reply));
     this.next();
   }
 

@@ -1,6 +1,6 @@
 import { Injectable, computed, inject, signal } from '@angular/core';
 import { takeUntilDestroyed, toObservable } from '@angular/core/rxjs-interop';
-import { type Observable, debounceTime, map, of, switchMap } from 'rxjs';
+import { EMPTY, type Observable, debounceTime, map, of, switchMap } from 'rxjs';
 import { calculatorVersion } from '#shared/estimates/calculator-version';
 import { canonicalJson } from '#shared/estimates/canonical-json';
 import type { Choice } from '#shared/estimates/draft';
@@ -12,6 +12,7 @@ import {
 } from '#shared/estimates/estimate-figures';
 import type { Figures, PricedFigures, WorkFigures } from '#shared/estimates/figures';
 import type { Risk } from '#shared/estimates/risk/risk';
+import { unlessTooLarge } from '#shared/money/too-large';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { DraftStore } from '../draft/draft-store';
 import { figuresDifference } from './figures-difference';
@@ -55,13 +56,14 @@ export class LiveFigures {
   );
   private readonly prepared = computed(() => {
     const input = this.input(this.chosen());
-    return input && this.isOwn() ? prepareEstimate(input) : undefined;
+    return input && this.isOwn() ? unlessTooLarge(() => prepareEstimate(input)) : undefined;
   });
   private readonly risk = computed(() => this.drawn()?.risk ?? this.serverRisk());
 
   readonly figures = computed<ReaderFigures | undefined>(() => {
     const prepared = this.prepared();
-    return prepared ? estimateFigures(prepared, this.risk()) : this.server();
+    // What becomes too large is refused by the server, in words; until then the figures stay as they were.
+    return (prepared && unlessTooLarge(() => estimateFigures(prepared, this.risk()))) ?? this.server();
   });
   /** Risk is being drawn for what was just typed; until then it is that of a moment ago. */
   readonly isRiskPending = computed(() => this.prepared() !== undefined && this.drawn()?.of !== this.prepared());
@@ -118,7 +120,8 @@ export class LiveFigures {
   /** Nothing is drawn twice: a new name, say, changes no risk. */
   private draw(prepared: PreparedEstimate): Observable<DrawnFor> {
     const before = this.drawn();
-    const input = prepared.risk;
+    const input = unlessTooLarge(() => prepared.risk);
+    if (!input) return EMPTY;
     if (before && canonicalJson(before.input) === canonicalJson(input)) return of({ ...before, of: prepared });
     return drawnBy(this.startRisk, input).pipe(map((drawn) => ({ ...drawn, of: prepared })));
   }
