@@ -8,6 +8,8 @@ import {
   signOut,
 } from '#shared/accounts/session-endpoints';
 import { foundAnother, readWorkshop } from '#shared/accounts/workshop-endpoints';
+import { beginClientVisit } from '#shared/client-page/visits-endpoints';
+import { linkTo, sampleIssue } from './sample-client-visit';
 import { password, startApi, type Api, type TestPerson } from './start-api';
 import { newSessionId } from '../../backend/src/platform/session/new-session-id';
 import { foundingSettings } from './test-workshop';
@@ -50,6 +52,51 @@ describe('time', () => {
     }
     api.clock.move({ minutes: 20, seconds: 1 });
     expect((await visitor.call(listPeople)).status).toBe(401);
+  });
+
+  const used = async (visitor: Visitor, hours: number) => {
+    for (let quarters = 0; quarters < hours * 4; quarters++) {
+      api.clock.move({ minutes: 15 });
+      expect((await visitor.call(listPeople)).status).toBe(200);
+    }
+  };
+
+  test.each<[string, (person: TestPerson) => Promise<number>]>([
+    [
+      'the workshop is entered again',
+      async ({ visitor, actor: { membershipId } }) =>
+        (await visitor.call(enterWorkshop, { body: { membershipId } })).status,
+    ],
+    [
+      'another workshop is founded',
+      async ({ visitor }) =>
+        (await visitor.call(foundAnother, { body: { name: 'Second Bench', ...foundingSettings } })).status,
+    ],
+    [
+      'the visit of a client is begun beside it',
+      async ({ visitor }) => {
+        // The owner of the start has been signed out by the hours gone.
+        const people = { ...api.ours.people, owner: await api.newcomer(api.ours, 'owner') };
+        const workshop = { ...api.ours, people };
+        const { issueId } = await sampleIssue(workshop, api);
+        const { token } = await linkTo(workshop, api, issueId);
+        return (await visitor.call(beginClientVisit, { body: { token } })).status;
+      },
+    ],
+  ])('its twelve hours go on when %s', async (_, change) => {
+    const person = await api.newcomer(api.ours, 'bench');
+    await used(person.visitor, 11);
+    expect(await change(person)).toBeLessThan(300);
+    await used(person.visitor, 0.75);
+    api.clock.move({ minutes: 15, seconds: 1 });
+    expect((await person.visitor.call(listPeople)).status).toBe(401);
+  });
+
+  test('signing in anew gives it twelve hours again', async () => {
+    const { visitor, email } = await api.newcomer(api.ours, 'bench');
+    await used(visitor, 11);
+    expect((await visitor.signIn(email, password)).status).toBe(200);
+    await used(visitor, 2);
   });
 
   test('requests that no hand made do not prolong it', async () => {

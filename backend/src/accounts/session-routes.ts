@@ -33,7 +33,7 @@ export const sessionRoutes = ({ identities, sessions, clock }: Parts): Route[] =
   mount(signOut, ({ session }) => session.signOut()),
   mount(enterWorkshop, async ({ person, body, session }) => {
     const identity = await identities.entering(person.accountId, body.membershipId);
-    await session.signIn(identity);
+    await session.enter(identity);
     return presentSession(session.forgeryToken, await identities.facts(identity));
   }),
   mount(listOwnSessions, async ({ person, session }) => {

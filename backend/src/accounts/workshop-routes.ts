@@ -24,16 +24,20 @@ interface Parts {
 }
 
 export function workshopRoutes({ foundations, workshops, identities }: Parts): Route[] {
-  const enter = async (session: SessionControl, identity: Identity) => {
-    await session.signIn(identity);
-    return presentSession(session.forgeryToken, await identities.facts(identity));
-  };
+  const present = async (session: SessionControl, identity: Identity) =>
+    presentSession(session.forgeryToken, await identities.facts(identity));
   return [
     mount(askToFound, ({ body }) => foundations.ask(body)),
-    mount(foundByLink, async ({ body, session, from }) =>
-      enter(session, await foundations.byLink(body.token, { password: body.password, address: from.address })),
-    ),
-    mount(foundAnother, async ({ person, body, session }) => enter(session, await foundations.another(person, body))),
+    mount(foundByLink, async ({ body, session, from }) => {
+      const identity = await foundations.byLink(body.token, { password: body.password, address: from.address });
+      await session.signIn(identity);
+      return present(session, identity);
+    }),
+    mount(foundAnother, async ({ person, body, session }) => {
+      const identity = await foundations.another(person, body);
+      await session.enter(identity);
+      return present(session, identity);
+    }),
     mount(readWorkshop, async ({ actor }) => presentWorkshop(await workshops.get(actor.workshopId))),
     mount(
       changeWorkshop,

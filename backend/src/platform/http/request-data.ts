@@ -10,5 +10,7 @@ declare module 'express-serve-static-core' {
     visitingClient?: ClientActor | undefined;
     /** The forgery token that the next session of the same person goes on with. */
     tokenToKeep?: string;
+    /** When somebody signed in, which the next session of theirs goes on with. */
+    begunAtToKeep?: number;
   }
 }

@@ -17,6 +17,7 @@ export const cookieName = (config: Config): string => (isPublic(config) ? '__Hos
 export const signedInOf = (request: Request): SignedIn | undefined => request.user as SignedIn | undefined;
 
 const beginSession = (request: Request): void => {
+  if (request.begunAtToKeep !== undefined) request.session.begunAt = request.begunAtToKeep;
   request.session.forgeryToken ??= request.tokenToKeep ?? randomBytes(32).toString('base64url');
   request.session.handle ??= randomUUID();
   request.session.agent ??= (request.get('user-agent') ?? '').slice(0, 200);
@@ -83,6 +84,7 @@ export class Sessions {
         return request.session.forgeryToken ?? '';
       },
       signIn,
+      enter: (identity) => this.enter(request, identity),
       beginVisit: (visit) => this.beginVisit(request, visit),
       signInByPassword: () => this.byPassword(request, signIn),
       signOut: () => this.signOut(request),
@@ -98,6 +100,13 @@ export class Sessions {
     });
   }
 
+  /** Nobody has proved anew who they are, so the session ends when it would have ended. */
+  private async enter(request: Request, identity: Identity): Promise<void> {
+    const { begunAt } = request.session;
+    if (begunAt !== undefined) request.begunAtToKeep = begunAt;
+    await this.signIn(request, identity);
+  }
+
   private visitRead(): RequestHandler {
     return async (request, _response, next) => {
       const { visit } = request.session;
@@ -108,11 +117,11 @@ export class Sessions {
 
   /** Under a new id, so that nobody else knows the session a client reads in. */
   private async beginVisit(request: Request, visit: Visit): Promise<void> {
-    const { passport, forgeryToken, handle } = request.session;
+    const { passport, forgeryToken, handle, begunAt } = request.session;
     await new Promise<void>((resolve, reject) => {
       request.session.regenerate((error) => (error ? reject(error as Error) : resolve()));
     });
-    Object.assign(request.session, { visit, ...(passport?.user ? { passport, forgeryToken, handle } : {}) });
+    Object.assign(request.session, { visit, ...(passport?.user ? { passport, forgeryToken, handle, begunAt } : {}) });
     beginSession(request);
     await new Promise<void>((resolve, reject) => {
       request.session.save((error: Error | undefined) => (error ? reject(error) : resolve()));

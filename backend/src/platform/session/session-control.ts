@@ -50,8 +50,10 @@ export interface SessionControl {
   readonly forgeryToken: string;
   /** Checks the e-mail and password in the body and signs in under a new session id; answers nobody when they do not fit. */
   signInByPassword(): Promise<Identity | undefined>;
-  /** Signs in under a new session id. */
+  /** Signs in under a new session id; its time begins anew. */
   signIn(identity: Identity): Promise<void>;
+  /** Goes on in another workshop under a new session id; its time goes on too. */
+  enter(identity: Identity): Promise<void>;
   /** Begins a client's visit under a new session id; whoever is signed in stays so. */
   beginVisit(visit: Visit): Promise<void>;
   signOut(): Promise<void>;

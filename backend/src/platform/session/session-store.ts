@@ -12,6 +12,7 @@ export const sessionLife = { idle_minutes: 30, stranger_minutes: 120, whole_minu
 
 interface SessionRow {
   readonly content: SessionData;
+  readonly createdAt: Date;
   readonly seenAt: Date;
 }
 
@@ -71,18 +72,19 @@ export class SessionStore extends Store {
 
   private async read(id: string): Promise<SessionData | null> {
     const [row] = await this.database.select<SessionRow>(
-      `SELECT content, seen_at AS seenAt FROM sessions
+      `SELECT content, created_at AS createdAt, seen_at AS seenAt FROM sessions
        WHERE id_hash = :hash AND seen_at > IF(account_id IS NULL, :stranger, :idle) AND created_at > :whole`,
       { hash: hashOf(id), ...this.ends() },
     );
-    return row ? { ...row.content, seenAt: row.seenAt.getTime() } : null;
+    return row ? { ...row.content, begunAt: row.createdAt.getTime(), seenAt: row.seenAt.getTime() } : null;
   }
 
   private async write(id: string, session: SessionData): Promise<void> {
     const user = session.passport?.user;
+    const now = this.clock.now();
     await this.database.execute(
       `INSERT INTO sessions (id_hash, id, account_id, membership_id, content, created_at, seen_at)
-       VALUES (:hash, :handle, :accountId, :membershipId, :content, :now, :now)
+       VALUES (:hash, :handle, :accountId, :membershipId, :content, :begun, :now)
        ON DUPLICATE KEY UPDATE account_id = VALUES(account_id), membership_id = VALUES(membership_id), content = VALUES(content)`,
       {
         hash: hashOf(id),
@@ -90,7 +92,8 @@ export class SessionStore extends Store {
         accountId: user?.accountId ?? null,
         membershipId: user?.membershipId ?? null,
         content: JSON.stringify(session),
-        now: this.clock.now(),
+        begun: new Date(session.begunAt ?? now),
+        now,
       },
     );
   }
