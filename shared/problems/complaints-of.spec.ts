@@ -31,3 +31,20 @@ describe('An entry', () => {
     });
   });
 });
+
+describe('Complaints', () => {
+  const many = Object.fromEntries(Array.from({ length: 200_000 }, (_, at) => [`key${at}`, 1]));
+
+  it('are told up to a hundred, and one more says how many there are besides', () => {
+    const read = readBy(z.strictObject({ name: z.string() }), many);
+    const complaints = complaintsOf(read.error as z.ZodError);
+    expect(complaints).toHaveLength(101);
+    expect(complaints[1]).toEqual({ path: ['key0'], code: 'entry-unknown', values: {} });
+    expect(complaints[100]).toEqual({ path: [], code: 'entries-more', values: { count: 199_901 } });
+  });
+
+  it('are all told to whoever asks for all', () => {
+    const read = readBy(z.strictObject({}), many);
+    expect(complaintsOf(read.error as z.ZodError, Infinity)).toHaveLength(200_000);
+  });
+});

@@ -66,11 +66,23 @@ function worded(issue: Issue): Pick<Complaint, 'code' | 'values'> {
 export const readBy = <S extends z.ZodType>(schema: S, value: unknown): z.ZodSafeParseResult<z.output<S>> =>
   schema.safeParse(value, { reportInput: true });
 
-/** Every complaint of a failed parse, worded by code, in the order of the fields; an unknown key is complained of at its own path. */
-export function complaintsOf(error: z.core.$ZodError): Complaint[] {
-  return error.issues.flatMap((issue) => {
-    const path = issue.path.map((part) => (typeof part === 'symbol' ? String(part) : part));
-    const paths = issue.code === 'unrecognized_keys' ? issue.keys.map((key) => [...path, key]) : [path];
-    return paths.map((at) => ({ path: at, ...worded(issue) }));
-  });
+/** So many complaints are told; whoever sends a hundred thousand wrong entries gets no answer as long. */
+export const mostComplaints = 100;
+
+/** Where an issue stands, at most so many places: an unknown key is complained of at its own path. */
+function pathsOf(issue: Issue, most: number): Complaint['path'][] {
+  const path = issue.path.map((part) => (typeof part === 'symbol' ? String(part) : part));
+  if (issue.code !== 'unrecognized_keys') return [path].slice(0, most);
+  return issue.keys.slice(0, most).map((key) => [...path, key]);
+}
+
+/** The complaints of a failed parse, worded by code, in the order of the fields; the last one says how many more there are than `most`. */
+export function complaintsOf(error: z.core.$ZodError, most = mostComplaints): Complaint[] {
+  const complaints: Complaint[] = [];
+  let count = 0;
+  for (const issue of error.issues) {
+    count += issue.code === 'unrecognized_keys' ? issue.keys.length : 1;
+    for (const path of pathsOf(issue, most - complaints.length)) complaints.push({ path, ...worded(issue) });
+  }
+  return count > most ? [...complaints, { path: [], ...plain('entries-more', { count: count - most }) }] : complaints;
 }

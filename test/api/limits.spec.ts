@@ -2,6 +2,7 @@ import { connect, type AddressInfo } from 'node:net';
 import { createServer, type Server } from 'node:http';
 import { listPeople } from '#shared/accounts/people-endpoints';
 import { changeOwnName } from '#shared/accounts/people-endpoints';
+import { changeEstimate } from '#shared/estimates/estimates-endpoints';
 import { startApi, type Api } from './start-api';
 
 /** Too much, too often, and not quite HTTP (ASVS 2.4.1, 4.2.1, 1.5.2, 15.3.5 to 15.3.7). */
@@ -77,6 +78,26 @@ test.each([
   expect(response.status).toBe(status);
   expect(response.headers['content-type']).toContain('application/problem+json');
   expect(({} as { isAdmin?: boolean }).isAdmin).toBeUndefined();
+});
+
+test.each([110_000, 190_000])('a body of %i entries nobody asked for is refused in a few words', async (count) => {
+  const surplus = Array.from({ length: count }, (_, at) => `"${at.toString(36)}":1`);
+  const response = await put(`{${surplus.join(',')}}`);
+  expect(response.status).toBe(400);
+  expect(response.text.length).toBeLessThan(20_000);
+  expect((response.body as { errors: unknown[] }).errors).toContainEqual({
+    path: [],
+    message: `${(count - 99).toLocaleString('en')} more entries need another look.`,
+  });
+});
+
+test('a body of more wrong entries than can be listed is refused', async () => {
+  const typed = Object.fromEntries(Array.from({ length: 150_000 }, (_, at) => [at.toString(36), 1]));
+  const params = { estimateId: '00000000-0000-4000-8000-000000000000' };
+  const member = { kind: 'member', id: params.estimateId, version: 1, content: { typed } };
+  const response = await api.as('owner').call(changeEstimate, { params, body: { changes: [member] } });
+  expect(response.status).toBe(400);
+  expect(response.text.length).toBeLessThan(20_000);
 });
 
 test('a body in an encoding we do not read is refused', async () => {

@@ -36,5 +36,6 @@ export const problems = {
   'entry-wrong-form': 'This is not written in the form expected here.',
   'entry-not-decimal': 'A plain number of nought or more, please, with six decimals at most.',
   'entry-twice': 'This is in the list already.',
+  'entries-more': '{count, plural, one {One more entry needs} other {# more entries need}} another look.',
   'entry-not-offered': 'Choose one of the values offered.',
 } as const;

@@ -22,16 +22,25 @@ const schemaOf = (endpoint: Endpoint, part: Part): z.ZodType => {
 
 const sent = (request: Request, part: Part): unknown => (Buffer.isBuffer(request[part]) ? {} : (request[part] ?? {}));
 
+/** Of hundreds of thousands of wrong entries a schema cannot even make a list: the stack ends first. */
+function readWhole(schema: z.ZodType, value: unknown): z.ZodSafeParseResult<unknown> {
+  try {
+    return readBy(schema, value);
+  } catch (error) {
+    if (error instanceof RangeError) throw new Rejection('invalid', 'problem-invalid');
+    throw error;
+  }
+}
+
 /** Parses the whole request and refuses it with all complaints at once; those of the body stand at their field's own path. */
 export function parseRequest(endpoint: Endpoint, request: Request): Parsed {
   const complaints: Complaint[] = [];
   const parse = (part: Part): unknown => {
-    const read = readBy(schemaOf(endpoint, part), sent(request, part));
+    const read = readWhole(schemaOf(endpoint, part), sent(request, part));
     if (read.success) return read.data;
     const at = part === 'body' ? [] : [part];
-    complaints.push(
-      ...complaintsOf(read.error).map((complaint) => ({ ...complaint, path: [...at, ...complaint.path] })),
-    );
+    for (const complaint of complaintsOf(read.error))
+      complaints.push({ ...complaint, path: [...at, ...complaint.path] });
     return undefined;
   };
   const parsed = { params: parse('params'), query: parse('query'), body: parse('body') };

@@ -40,7 +40,7 @@ const ofWhole: readonly WordCode[] = [
 function ofSchema(error: z.core.$ZodError, building: CardBuilding): Complaint[] {
   const told = new Set(building.complaints.map(({ path }) => path.join('\n')));
   if (building.complaints.some(({ code }) => ofWhole.includes(code))) return [];
-  const placed = complaintsOf(error).map((one) => ({ ...one, path: building.placeOf(one.path) }));
+  const placed = complaintsOf(error, Infinity).map((one) => ({ ...one, path: building.placeOf(one.path) }));
   return placed.filter(({ path }) => !told.has(path.join('\n')));
 }
 
