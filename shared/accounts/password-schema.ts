@@ -1,5 +1,6 @@
 import * as z from 'zod';
 import { complain } from '#shared/problems/complaints-of';
+import { asTyped } from '#shared/problems/entry-schema';
 
 /** NIST SP 800-63B-4: at least 15 characters where there is no second factor; nobody needs more than 128. */
 export const passwordLength = { minimum: 15, maximum: 128 } as const;
@@ -8,7 +9,7 @@ export const passwordLength = { minimum: 15, maximum: 128 } as const;
 const characters = (password: string): number => [...password.normalize('NFKC')].length;
 
 /** A password somebody signs in with: whatever they type, within bounds. */
-export const enteredPassword = z.string().min(1).max(1_024);
+export const enteredPassword = asTyped(1_024).min(1);
 
 /** A password somebody chooses: only its length is asked here, the server refuses common ones. Spaces count, also at the end. */
 export const chosenPassword = enteredPassword

@@ -1,11 +1,11 @@
 import * as z from 'zod';
 import { letterKinds } from '#shared/agreements/letter-kinds';
-import { line, paragraphs } from '#shared/problems/entry-schema';
+import { isBlank, line, paragraphs } from '#shared/problems/entry-schema';
 
 /** The words of a letter as a workshop writes them; which placeholders they may hold depends on the kind. */
 export const letterTextSchema = z.strictObject({
   subject: line(200),
-  text: paragraphs(8000).refine((text) => text.trim() !== ''),
+  text: paragraphs(8000).refine((text) => !isBlank(text)),
 });
 
 /** The words of one kind of letter; version 0 where the workshop has none of its own. */

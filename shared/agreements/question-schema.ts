@@ -1,8 +1,8 @@
 import * as z from 'zod';
-import { paragraphs } from '#shared/problems/entry-schema';
+import { isBlank, paragraphs } from '#shared/problems/entry-schema';
 
 /** What somebody writes into the thread of a job: something, at most 4,000 characters. */
-export const questionText = paragraphs(4000).refine((text) => text.trim() !== '');
+export const questionText = paragraphs(4000).refine((text) => !isBlank(text));
 
 /** One entry of a thread, as both sides read it. */
 export const questionSchema = z.strictObject({

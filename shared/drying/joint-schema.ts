@@ -1,9 +1,10 @@
 import * as z from 'zod';
+import { asTyped } from '#shared/problems/entry-schema';
 
 /** A joint across the grain, to see how it moves: entered, worked and forgotten. */
 export const jointSchema = z.strictObject({
   width_mm: z.number().gt(0).max(1e5),
-  timberId: z.string().min(1),
+  timberId: asTyped(80).min(1),
   cut: z.enum(['radial', 'tangential']),
   isGessoed: z.boolean(),
 });

@@ -2,7 +2,7 @@ import * as z from 'zod';
 import { paidFor, paidText, paidUnits, type MeasuredWork } from '#shared/estimates/price/measured-work';
 import { measuringRules } from '#shared/measure/paid-quantity';
 import { complain } from '#shared/problems/complaints-of';
-import { line } from '#shared/problems/entry-schema';
+import { asTyped, line } from '#shared/problems/entry-schema';
 
 const length = z.number().min(0).max(1e6).nullable();
 
@@ -22,7 +22,7 @@ export const measuredWorkSchema = z.strictObject({
   rule: z.enum(measuringRules),
   measures: z.array(workMeasureSchema).min(1).max(mostMeasures),
   typed: z
-    .record(z.string().max(40), line(60))
+    .record(asTyped(40), line(60))
     .refine((typed) => Object.keys(typed).length <= 3 * mostMeasures, complain('entry-too-many', { maximum: 120 })),
 }) satisfies z.ZodType<MeasuredWork>;
 

@@ -10,7 +10,7 @@ import { recuttingManners } from '#shared/carving/carving-card';
 import { layingWays } from '#shared/leaf/leaf-card';
 import { complain } from '#shared/problems/complaints-of';
 import { cardItemId, percentEntry } from '#shared/problems/card-entry-schema';
-import { count, identifier, line, optionalLine, paragraphs } from '#shared/problems/entry-schema';
+import { asTyped, count, identifier, line, optionalLine, paragraphs } from '#shared/problems/entry-schema';
 
 const few = <S extends z.ZodType>(item: S, maximum: number) => z.array(item).max(maximum);
 
@@ -55,7 +55,7 @@ const memberFields = z.strictObject({
   lot: optionalLine(60),
   note: paragraphs(2000),
   typed: z
-    .record(z.string().max(120), z.string().max(60))
+    .record(asTyped(120), asTyped(60))
     .refine((typed) => Object.keys(typed).length <= 400, complain('entry-too-many', { maximum: 400 })),
   alternativeId: identifier.nullable(),
 });

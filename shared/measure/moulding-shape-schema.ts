@@ -1,8 +1,9 @@
 import * as z from 'zod';
 import { displacementEntry, endsSchema, fluted, lengthEntry } from '#shared/measure/length-schema';
 import { classicalMembers } from '#shared/measure/profile-element';
+import { asTyped } from '#shared/problems/entry-schema';
 
-const drawn = { id: z.string().min(1).max(64), across_mm: displacementEntry, up_mm: displacementEntry };
+const drawn = { id: asTyped(64).min(1), across_mm: displacementEntry, up_mm: displacementEntry };
 
 /** One element of a profile: a classical member, a line or an arc. */
 export const profileElementSchema = z.discriminatedUnion('element', [

@@ -1,33 +1,47 @@
 import * as z from 'zod';
 import { complain } from '#shared/problems/complaints-of';
+import { isWellFormed } from '#shared/problems/is-well-formed';
 
-/** Control characters and the marks that turn the direction of text: they have no place in a name, and could forge a header or a log line. */
-const unseen = /[\u0000-\u001f\u007f-\u009f\u2028\u2029\u202a-\u202e\u2066-\u2069]/;
-const unseenButBreaks = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f\u202a-\u202e\u2066-\u2069]/;
+/** Control characters, signs that are none, and the marks that turn the direction of text: they have no place in a name, and could forge a header or a log line. */
+const unseen = /[\u0000-\u001f\u007f-\u009f\u061c\u200e\u200f\u2028\u2029\u202a-\u202e\u2066-\u2069\ufffe\uffff]/;
+const unseenButBreaks =
+  /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f\u061c\u200e\u200f\u202a-\u202e\u2066-\u2069\ufffe\uffff]/;
+
+/** Letters that are drawn as nothing (soft hyphens, spaces of no width, fillers): alone they make no text. */
+const onlyUndrawn = /^[\s\p{Default_Ignorable_Code_Point}\u2800]*$/u;
+const withoutUndrawn = (text: string): string => (onlyUndrawn.test(text) && !unseen.test(text) ? '' : text);
+
+/** Text of 0 to `maximum` characters just as it was typed, for what is read in another way or names something. */
+export const asTyped = (maximum: number) => z.string().max(maximum).refine(isWellFormed, complain('entry-wrong-form'));
 
 /** One line of text of 1 to `maximum` characters, trimmed, without control characters. */
 export const line = (maximum: number) =>
   z
     .string()
     .trim()
+    .overwrite(withoutUndrawn)
     .min(1)
     .max(maximum)
-    .refine((text) => !unseen.test(text), complain('entry-wrong-form'));
+    .refine((text) => !unseen.test(text) && isWellFormed(text), complain('entry-wrong-form'));
 
 /** One line of text that may be left empty. */
 export const optionalLine = (maximum: number) =>
   z
     .string()
     .trim()
+    .overwrite(withoutUndrawn)
     .max(maximum)
-    .refine((text) => !unseen.test(text), complain('entry-wrong-form'));
+    .refine((text) => !unseen.test(text) && isWellFormed(text), complain('entry-wrong-form'));
 
 /** Text of several lines that may be left empty, at most `maximum` characters. */
 export const paragraphs = (maximum: number) =>
   z
     .string()
     .max(maximum)
-    .refine((text) => !unseenButBreaks.test(text), complain('entry-wrong-form'));
+    .refine((text) => !unseenButBreaks.test(text) && isWellFormed(text), complain('entry-wrong-form'));
+
+/** Whether there is nothing to read in a text. */
+export const isBlank = (text: string): boolean => onlyUndrawn.test(text);
 
 /** An id: a UUID in small letters. */
 export const identifier = z.uuid().regex(/^[0-9a-f-]{36}$/);
@@ -35,7 +49,8 @@ export const identifier = z.uuid().regex(/^[0-9a-f-]{36}$/);
 /** An e-mail address in small letters, at most 254 characters (RFC 5321). */
 export const emailAddress = z.string().trim().toLowerCase().min(1).max(254).pipe(z.email());
 
-const isWebAddress = (text: string): boolean => /^(https?:\/\/[^\s/?#@]+|mailto:[^\s@]+@[^\s@]+)[^\s]*$/i.test(text);
+const isWebAddress = (text: string): boolean =>
+  /^(https?:\/\/[^\s/?#@]+|mailto:[^\s@]+@[^\s@]+)[^\s]*$/i.test(text) && !unseen.test(text) && isWellFormed(text);
 
 /** An address a page may link to: http, https or mailto only. */
 export const webAddress = z.string().trim().max(2_000).refine(isWebAddress, complain('entry-not-link'));

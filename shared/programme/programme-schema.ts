@@ -3,7 +3,7 @@ import { holdPoints, stepKinds } from '#shared/buildups/buildup';
 import { climateSchema } from '#shared/drying/drying-card-schema';
 import { complainAt } from '#shared/problems/card-entry-schema';
 import { complain } from '#shared/problems/complaints-of';
-import { day, identifier, instant } from '#shared/problems/entry-schema';
+import { asTyped, day, identifier, instant } from '#shared/problems/entry-schema';
 import type { ProgrammeDates } from '#shared/programme/programme-dates';
 import type { ProgrammeInputs, TaskMark } from '#shared/programme/programme-inputs';
 import type { ProgrammeItem } from '#shared/programme/programme-item';
@@ -16,7 +16,7 @@ export const minutes = z.int().min(-5e7).max(5e7);
 const amount = z.int().min(0).max(1e6);
 
 /** The id of a task, of a lot or of an approval: it says what it is of. */
-export const programmeId = z.string().min(1).max(400);
+export const programmeId = asTyped(400).min(1);
 
 const span = { start_minutes: minutes, end_minutes: minutes };
 const momentSpan = z.strictObject(span);
@@ -80,7 +80,7 @@ const plannedTask = z.strictObject({
   ...span,
   taskId: programmeId,
   spans: z.array(momentSpan).max(400),
-  personIds: z.array(z.string().max(100)).max(100),
+  personIds: z.array(asTyped(100)).max(100),
   dryUntil_minutes: minutes.nullable(),
   windowUntil_minutes: minutes.nullable(),
   slack_minutes: minutes,
@@ -99,7 +99,7 @@ export const programmePlanSchema = z.strictObject({
   gap: z.number().nullable(),
   plans: amount,
   findings: z.array(findingSchema).max(500),
-  cycle: z.array(z.string().max(900)).max(500),
+  cycle: z.array(asTyped(900)).max(500),
 }) satisfies z.ZodType<Programme>;
 
 export const programmeItemSchema = z.strictObject({

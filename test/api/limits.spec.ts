@@ -100,6 +100,22 @@ test('a body of more wrong entries than can be listed is refused', async () => {
   expect(response.text.length).toBeLessThan(20_000);
 });
 
+test.each([
+  ['a text', '{"name":"a\\ud800b"}', ['name']],
+  ['a name nobody asked for', '{"name":"Herons bench","a\\udc00":1}', ['a\udc00']],
+  ['a text nobody asked for', '{"name":"Herons bench","more":{"deep":["\\ud83d"]}}', ['more', 'deep', 0]],
+])('half a pair of surrogates in %s is refused where it stands', async (_, body, path) => {
+  const response = await put(body);
+  expect(response.status).toBe(400);
+  const { errors } = response.body as { errors: { path: unknown[] }[] };
+  expect(errors.filter((one) => JSON.stringify(one.path) === JSON.stringify(path))).toHaveLength(1);
+});
+
+test('a body nested as deep as it is long is refused', async () => {
+  const response = await put(`{"name":${'['.repeat(900_000)}${']'.repeat(900_000)}}`);
+  expect(response.status).toBe(400);
+});
+
 test('a body in an encoding we do not read is refused', async () => {
   expect((await put('{"name":"Herons bench"}', { 'content-encoding': 'compress' })).status).toBe(415);
   expect((await put('{"name":"Herons bench"}', { 'content-type': 'application/json; charset=latin1' })).status).toBe(

@@ -4,6 +4,7 @@ import type { Complaint } from '#shared/problems/complaint';
 import { complaintsOf, readBy } from '#shared/problems/complaints-of';
 import { Rejection } from '#shared/problems/rejection';
 import * as z from 'zod';
+import { unkeepableTexts } from './unkeepable-texts';
 
 const nothing = z.strictObject({});
 type Part = 'params' | 'query' | 'body';
@@ -32,8 +33,11 @@ function readWhole(schema: z.ZodType, value: unknown): z.ZodSafeParseResult<unkn
   }
 }
 
+const placeOf = ({ path }: Complaint): string => path.join('\n');
+
 /** Parses the whole request and refuses it with all complaints at once; those of the body stand at their field's own path. */
 export function parseRequest(endpoint: Endpoint, request: Request): Parsed {
+  const unkeepable = unkeepableTexts(request.body);
   const complaints: Complaint[] = [];
   const parse = (part: Part): unknown => {
     const read = readWhole(schemaOf(endpoint, part), sent(request, part));
@@ -44,6 +48,8 @@ export function parseRequest(endpoint: Endpoint, request: Request): Parsed {
     return undefined;
   };
   const parsed = { params: parse('params'), query: parse('query'), body: parse('body') };
+  const told = new Set(complaints.map(placeOf));
+  complaints.push(...unkeepable.filter((complaint) => !told.has(placeOf(complaint))));
   if (complaints.length > 0) throw new Rejection('invalid', 'problem-invalid', { complaints });
   return parsed;
 }
