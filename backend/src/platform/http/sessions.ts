@@ -16,6 +16,13 @@ export const cookieName = (config: Config): string => (isPublic(config) ? '__Hos
 
 export const signedInOf = (request: Request): SignedIn | undefined => request.user as SignedIn | undefined;
 
+/** For the log: whose request this is. */
+export function nameCaller(request: Request, signedIn: SignedIn | undefined): void {
+  if (!signedIn) return;
+  request.accountId = signedIn.person.accountId;
+  request.workshopId = signedIn.actor?.workshopId;
+}
+
 const beginSession = (request: Request): void => {
   if (request.begunAtToKeep !== undefined) request.session.begunAt = request.begunAtToKeep;
   request.session.forgeryToken ??= request.tokenToKeep ?? randomBytes(32).toString('base64url');
@@ -30,7 +37,7 @@ export class Sessions {
   constructor(
     private readonly config: Config,
     private readonly store: SessionStore,
-    identities: Identities,
+    private readonly identities: Identities,
     private readonly visits: Visits,
   ) {
     this.passport.serializeUser(
@@ -92,12 +99,13 @@ export class Sessions {
   }
 
   /** Under a new id; the token stays for the same person, whose page still holds it. */
-  private signIn(request: Request, identity: Identity): Promise<void> {
+  private async signIn(request: Request, identity: Identity): Promise<void> {
     const { passport, forgeryToken } = request.session;
     if (passport?.user?.accountId === identity.accountId && forgeryToken) request.tokenToKeep = forgeryToken;
-    return new Promise((resolve, reject) => {
+    await new Promise<void>((resolve, reject) => {
       request.logIn(identity, (error) => (error ? reject(error as Error) : resolve()));
     });
+    nameCaller(request, await this.identities.load(identity));
   }
 
   /** Nobody has proved anew who they are, so the session ends when it would have ended. */

@@ -15,7 +15,7 @@ import { Readiness } from './readiness';
 import { reference } from './reference';
 import { requestLimits } from './request-limits';
 import { requestLog } from './request-log';
-import { Sessions, cookieName, signedInOf } from './sessions';
+import { Sessions, cookieName, nameCaller, signedInOf } from './sessions';
 import { webPages } from './web-pages';
 import { Rejection } from '#shared/problems/rejection';
 
@@ -41,13 +41,8 @@ const neverKept: RequestHandler = (_request, response, next) => {
   next();
 };
 
-/** For the log: whose request this is. */
 const named: RequestHandler = (request, _response, next) => {
-  const signedIn = signedInOf(request);
-  if (signedIn) {
-    request.accountId = signedIn.person.accountId;
-    request.workshopId = signedIn.actor?.workshopId;
-  }
+  nameCaller(request, signedInOf(request));
   request.workshopId ??= request.visitingClient?.workshopId;
   next();
 };
