@@ -1,5 +1,5 @@
 import type { DecimalText } from '#shared/money/decimal';
-import { guardedText } from '#shared/documents/guarded-text';
+import { guardedText } from '#shared/words/guarded-text';
 
 /** What a cell of a list holds: a text somebody may have typed, a figure, or a decimal amount with all its digits (-120.00). */
 export type CsvCell = string | number | { readonly amount: DecimalText };

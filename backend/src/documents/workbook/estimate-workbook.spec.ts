@@ -5,7 +5,16 @@ import { estimateWorkbook, workbookPlan } from './estimate-workbook';
 
 jest.setTimeout(60_000);
 
-const typed = ['=HYPERLINK("http://x.example","y")', '+1', '-1+1', '@SUM(A1)', '\t=1', '\r=1', '\u0000=1'] as const;
+const typed = [
+  '=HYPERLINK("http://x.example","y")',
+  '+1',
+  '-1+1',
+  '@SUM(A1)',
+  '\t=1',
+  '\r=1',
+  '\u0000=1',
+  '_x000D_=1',
+] as const;
 
 const hostile = () => {
   const draft = smallDraft({
@@ -44,7 +53,7 @@ describe('the workbook of an estimate', () => {
     const cells = cellsOf(await readBack(await estimateWorkbook(sampleSnapshot(hostile()))));
     const texts = cells.flatMap(({ value }) => (typeof value === 'string' ? [value] : []));
     expect(texts.filter((text) => /^\s*[=+\-@\t\r\0]/.test(text))).toEqual([]);
-    for (const text of ['\'=HYPERLINK("http://x.example","y")', "'+1", "'-1+1", "'@SUM(A1)"])
+    for (const text of ['\'=HYPERLINK("http://x.example","y")', "'+1", "'-1+1", "'@SUM(A1)", '_x000D_=1'])
       expect(texts).toContain(text);
     const formulas = cells.flatMap(({ value }) =>
       typeof value === 'object' && value && 'formula' in value ? [String(value.formula)] : [],

@@ -1,5 +1,6 @@
 import { Workbook, type Cell, type Row, type Worksheet } from 'exceljs';
-import { guardedText } from '#shared/documents/guarded-text';
+import { guardedText } from '#shared/words/guarded-text';
+import { sheetText } from '#shared/words/sheet-text';
 import { fixedZipDates } from './fixed-zip-dates';
 import type { NameBook } from './name-book';
 import { columnLetters, type CellContent, type RowLook, type Sheet, type SheetRow } from './sheet';
@@ -18,7 +19,7 @@ const fill = (argb: string) => ({ type: 'pattern', pattern: 'solid', fgColor: { 
 const under = (argb: string, style: 'thin' | 'medium' = 'thin') => ({ bottom: { style, color: { argb } } });
 
 function contentOf(content: CellContent): Cell['value'] {
-  if (typeof content === 'string') return guardedText(content);
+  if (typeof content === 'string') return sheetText(content);
   if (content === null || typeof content === 'number') return content;
   return 'input' in content ? content.input : { formula: content.formula, result: content.value };
 }
