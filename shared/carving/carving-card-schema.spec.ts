@@ -72,7 +72,7 @@ describe('ornamentUseSchema', () => {
     ['pieces are whole', { extent: { way: 'pieces', count: 1.5 } }, ['extent.count entry-not-whole']],
     ['an area has no count', { extent: { way: 'area', area_mm2: 100, count: 1 } }, ['extent.count entry-unknown']],
     ['a way is chosen', { extent: { way: 'guess' } }, ['extent.way entry-not-offered']],
-    ['a size is more than nothing', { size_mm: 0 }, ['size_mm entry-not-above']],
+    ['a size is more than nothing', { size_mm: 0 }, ['size_mm entry-too-small']],
     ['a relief is one of the six', { relief: 'bold' }, ['relief entry-not-offered']],
   ])('%s', (_sentence, changed, expected) => {
     expect(told(ornamentUseSchema, { ...use, ...changed })).toEqual(expected);

@@ -2,6 +2,7 @@ import * as z from 'zod';
 import { type CarvingCard, type CarvingStage, learningModels } from '#shared/carving/carving-card';
 import { carvingItemKinds, ornamentWays } from '#shared/carving/ornament';
 import { planCurves } from '#shared/carving/plan-curve';
+import { least_mm } from '#shared/measure/length-schema';
 import { reliefs } from '#shared/measure/relief';
 import {
   cardItemId,
@@ -15,7 +16,7 @@ import { complain } from '#shared/problems/complaints-of';
 import { tripleEntry } from '#shared/units/triple-schema';
 
 const hours = tripleEntry(z.number().min(0).max(10_000));
-const reference_mm = z.number().gt(0).max(100_000);
+const reference_mm = z.number().min(least_mm).max(100_000);
 const shrinkage = z.number().min(0).max(0.02);
 
 const ornamentSchema = z.strictObject({

@@ -1,12 +1,13 @@
 import * as z from 'zod';
 import type { OrnamentExtent, OrnamentUse } from '#shared/carving/ornament-use';
 import { planCurves } from '#shared/carving/plan-curve';
+import { isNoLengthOrKept, least_mm, shorterThanKept } from '#shared/measure/length-schema';
 import { reliefs } from '#shared/measure/relief';
 import { cardItemId } from '#shared/problems/card-entry-schema';
 import { complain } from '#shared/problems/complaints-of';
 import { count, identifier } from '#shared/problems/entry-schema';
 
-const length_mm = z.number().min(0).max(1e6);
+const length_mm = z.number().min(0).max(1e6).refine(isNoLengthOrKept, shorterThanKept);
 
 const leavesRoom = (run: Extract<OrnamentExtent, { way: 'run' }>): boolean =>
   run.run_mm < 0 || run.mitreLeaf_mm * run.mitreLeaves + (run.centre_mm ?? 0) <= run.run_mm;
@@ -32,7 +33,7 @@ export const ornamentUseSchema = z.strictObject({
   id: identifier,
   ornamentId: cardItemId,
   extent: ornamentExtentSchema,
-  size_mm: z.number().gt(0).max(1e5).nullable(),
+  size_mm: z.number().min(least_mm).max(1e5).nullable(),
   relief: z.enum(reliefs),
   isUndercut: z.boolean(),
   plan: z.enum(planCurves),

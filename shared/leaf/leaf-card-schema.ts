@@ -1,6 +1,7 @@
 import * as z from 'zod';
 import { type LeafCard, leafCharges, leafFinishes, layingWays } from '#shared/leaf/leaf-card';
 import { type LeafBreak, type LeafProduct, alloyMetals, leafForms, leafMetals } from '#shared/leaf/leaf-product';
+import { least_mm } from '#shared/measure/length-schema';
 import {
   cardItemId,
   cardItemName,
@@ -47,7 +48,7 @@ export const leafProductSchema = z
     carat: z.number().gt(0).max(24).nullable(),
     alloy: alloySchema,
     side_mm: z.number().min(5).max(1000),
-    ribbon_mm: z.number().gt(0).max(1e6).nullable(),
+    ribbon_mm: z.number().min(least_mm).max(1e6).nullable(),
     leavesPerBooklet: z.int().min(1).max(10_000),
     price: positiveDecimalEntry,
     breaks: z.array(breakSchema).max(6).superRefine(packsOnce),

@@ -1,7 +1,14 @@
 import * as z from 'zod';
+import { complain } from '#shared/problems/complaints-of';
 
-/** A size in mm: 0 to under 100 m. */
-export const lengthEntry = z.number().min(0).lt(1e5);
+/** No length that is kept is shorter; what is divided by one stays within what can be reckoned with. */
+export const least_mm = 0.001;
+
+export const isNoLengthOrKept = (length_mm: number): boolean => length_mm <= 0 || length_mm >= least_mm;
+export const shorterThanKept = complain('entry-too-small', { minimum_mm: least_mm });
+
+/** A size in mm: none, or a thousandth of a millimetre to under 100 m. */
+export const lengthEntry = z.number().min(0).lt(1e5).refine(isNoLengthOrKept, shorterThanKept);
 
 /** A displacement in mm, either way. */
 export const displacementEntry = z.number().gt(-1e5).lt(1e5);

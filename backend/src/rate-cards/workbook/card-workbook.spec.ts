@@ -1,5 +1,6 @@
 import { Workbook } from 'exceljs';
 import * as fc from 'fast-check';
+import { cardItemName } from '#shared/problems/card-entry-schema';
 import { problemStatus } from '#shared/problems/problem-schema';
 import { Rejection } from '#shared/problems/rejection';
 import type { RateCard } from '#shared/rate-cards/rate-card';
@@ -227,10 +228,7 @@ describe('A workbook that was changed', () => {
   });
 });
 
-const isName = (text: string): boolean =>
-  text.trim() === text &&
-  text !== '' &&
-  !/[\u0000-\u001f\u007f-\u009f\u2028\u2029\u202a-\u202e\u2066-\u2069\ufffe\uffff]/.test(text);
+const isName = (text: string): boolean => cardItemName.safeParse(text).data === text;
 
 test('refusals have a status of their own', () => {
   expect([problemStatus.invalid, problemStatus['too-large'], problemStatus.unsupported]).toEqual([400, 413, 415]);
