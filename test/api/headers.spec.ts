@@ -3,6 +3,7 @@ import { join } from 'node:path';
 import { brotliCompressSync } from 'node:zlib';
 import request from 'supertest';
 import { putLogo, readLogo } from '#shared/accounts/workshop-endpoints';
+import { listRateCards, readRateCard } from '#shared/rate-cards/rate-cards-endpoints';
 import { disposition } from '../../backend/src/platform/http/send';
 import { startApi, type Api } from './start-api';
 
@@ -79,6 +80,24 @@ test('the policy of a page allows our own files only', async () => {
   expect(policy).toMatch(/base-uri 'self'/);
   expect(policy).toMatch(/script-src 'self';/);
   expect(policy).toMatch(/require-trusted-types-for 'script'/);
+});
+
+test('an answer of more than a kilobyte comes made smaller to whoever can read it so', async () => {
+  const { body } = await api.as('owner').call(listRateCards);
+  const [{ id }] = (body as { items: { id: string }[] }).items;
+  const asked = (encoding: string) =>
+    api
+      .as('owner')
+      .call(readRateCard, { params: { rateCardId: id } })
+      .set('accept-encoding', encoding);
+  const [smaller, plain] = [await asked('gzip'), await asked('identity')];
+  expect(smaller.headers).toMatchObject({
+    'content-encoding': 'gzip',
+    vary: expect.stringContaining('Accept-Encoding') as string,
+  });
+  expect(plain.headers['content-encoding']).toBeUndefined();
+  expect(plain.text.length).toBeGreaterThan(1024);
+  expect(smaller.body).toEqual(plain.body);
 });
 
 test('a text of the pages comes by brotli where it was made smaller and can be read, under its own name and type', async () => {
