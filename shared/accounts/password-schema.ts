@@ -1,4 +1,3 @@
-import * as z from 'zod';
 import { complain } from '#shared/problems/complaints-of';
 import { asTyped } from '#shared/problems/entry-schema';
 

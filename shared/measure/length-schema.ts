@@ -4,7 +4,9 @@ import { complain } from '#shared/problems/complaints-of';
 /** No length that is kept is shorter; what is divided by one stays within what can be reckoned with. */
 export const least_mm = 0.001;
 
+/** Whether a length in mm is none, or long enough to be kept; less than none is for another rule. */
 export const isNoLengthOrKept = (length_mm: number): boolean => length_mm <= 0 || length_mm >= least_mm;
+/** What is said of a length shorter than any that is kept. */
 export const shorterThanKept = complain('entry-too-small', { minimum_mm: least_mm });
 
 /** A size in mm: none, or a thousandth of a millimetre to under 100 m. */
