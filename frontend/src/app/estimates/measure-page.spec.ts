@@ -1,11 +1,14 @@
 import { type ComponentFixture, TestBed } from '@angular/core/testing';
 import { ActivatedRoute, convertToParamMap, provideRouter } from '@angular/router';
 import { BehaviorSubject, map } from 'rxjs';
+import type { MemberOrnament } from '#shared/estimates/member';
+import { ornamentForSpecs } from '#shared/estimates/member-for-specs';
 import type { MouldingShape } from '#shared/measure/moulding-shape';
 import { shapeDefaults } from '#shared/measure/shape-defaults';
 import type { Role } from '#shared/actor/role';
 import { EstimateServer, ids, workspaceOn } from '../../test/estimate-server';
 import { signIn, words } from '../../test/sign-in';
+import { newId } from '../core/new-id';
 import { UnfinishedEntries } from './draft/unfinished-entries';
 import { EstimateStore } from './estimate-store';
 import { MeasurePage } from './measure-page';
@@ -233,6 +236,26 @@ describe('MeasurePage', () => {
       { way: 'share', share_percent: 70 },
       { way: 'share', share_percent: 30 },
     ]);
+  });
+
+  it('has the first zone take up what is carved already, as high as that is, in one step', async () => {
+    const carved = (given: Partial<MemberOrnament>) => ornamentForSpecs({ id: newId(), ...given });
+    const ornaments = [
+      carved({ ornamentId: 'egg-and-dart', relief: 'low' }),
+      carved({ relief: 'high' }),
+      // Work done once has no relief of its own.
+      carved({ ornamentId: 'clay-model', relief: 'in-the-round' }),
+    ];
+    server.changeElsewhere(ids.leg, { ornaments });
+    await open();
+    await show(ids.leg);
+    await click('Add a zone');
+    const [zone] = store.members()[1].zones;
+    expect(zone).toMatchObject({ name: 'All of it', relief: 'high' });
+    expect(store.members()[1].ornaments.map(({ zoneId }) => zoneId)).toEqual([zone.id, zone.id, zone.id]);
+    store.undo();
+    await settle();
+    expect(store.members()[1]).toMatchObject({ zones: [], ornaments });
   });
 
   it('moves a zone with Alt and the arrows, keeps the new order and takes it back', async () => {

@@ -4,10 +4,9 @@ import type { Zone } from '#shared/estimates/member';
 import { priceByTheLeaf } from '#shared/leaf/leaf-totals';
 import { minorOf } from '#shared/money/minor-of';
 import { Formats } from '../../core/formats/formats';
-import { newId } from '../../core/new-id';
 import type { EditedCell } from '../../ui/table/figure-column';
 import { EstimateStore } from '../estimate-store';
-import { newZone } from '../measuring/new-zone';
+import { addZone } from '../measuring/add-zone';
 import { memberForm } from '../members/member-form';
 import { MemberSelection } from '../members/member-selection';
 import type { ZoneRow } from './zone-row';
@@ -42,11 +41,7 @@ export class MemberZones {
   }
 
   add(): void {
-    const zones = this.rows().map(({ zone }) => zone);
-    const name = zones.length === 0 ? $localize`All of it` : $localize`Zone ${zones.length + 1}:number:`;
-    const id = newId();
-    this.form.insert('zones', zones.length, newZone({ id, name }, zones, this.store.card()));
-    this.choose(id);
+    this.choose(addZone(this.form, this.store.card()));
   }
 
   remove({ path }: ZoneRow): void {

@@ -14,7 +14,6 @@ import type { Zone } from '#shared/estimates/member';
 import type { ProfileElement } from '#shared/measure/profile-element';
 import { reliefs } from '#shared/measure/relief';
 import { Formats } from '../../core/formats/formats';
-import { newId } from '../../core/new-id';
 import { PartPicker, reliefNames } from '../../measure';
 import { EntryAt } from '../../ui/field/entry-at';
 import type { Explained } from '../../ui/figure/explained';
@@ -25,7 +24,7 @@ import { StepButtons } from '../../ui/order/step-buttons';
 import { EstimateStore } from '../estimate-store';
 import type { MemberForm } from '../members/member-form';
 import { MemberSelection } from '../members/member-selection';
-import { newZone } from './new-zone';
+import { addZone } from './add-zone';
 
 /** The zones of a member: what of its surface each takes, and how deep its relief is. They change places by their grip or by Alt and the arrows. What is laid on it is chosen in Gild. */
 @Component({
@@ -77,12 +76,7 @@ export class ZoneList {
   }
 
   protected add(): void {
-    const zones = this.zones().map(({ zone }) => zone);
-    const start = {
-      id: newId(),
-      name: zones.length === 0 ? $localize`All of it` : $localize`Zone ${zones.length + 1}:number:`,
-    };
-    this.form().insert('zones', zones.length, newZone(start, zones, this.store.card()));
+    addZone(this.form(), this.store.card());
   }
 
   protected remove(index: number): void {
