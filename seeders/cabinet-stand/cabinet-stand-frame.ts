@@ -83,7 +83,7 @@ function bracket(): MemberEntry {
 
 function apronPlaque(): MemberEntry[] {
   const field = zoneEntry('Field', { ...sealedSilver, relief: 'low' });
-  const rim = zoneEntry('Rim', giltOnOil);
+  const rim = zoneEntry('Rim', { ...giltOnOil, relief: 'low' });
   return [
     memberEntry(
       'Round plaque',

@@ -9,7 +9,7 @@ import { giltOnOil, sealedSilver, whiteGold } from './cabinet-stand-finishes';
 const noEnds = { top: false, bottom: false };
 
 function frontLeg(): MemberEntry {
-  const shaft = zoneEntry('Fluted shaft', { ...partsOf('shaft', 'neck'), ...giltOnOil });
+  const shaft = zoneEntry('Fluted shaft', { ...partsOf('shaft', 'neck'), ...giltOnOil, relief: 'low' });
   const turnings = zoneEntry('Base and cap', { ...partsOf('base', 'hollow', 'cap'), ...giltOnOil });
   const bead = zoneEntry('Silver bead', { ...partsOf('bead'), ...sealedSilver });
   return memberEntry(
@@ -81,7 +81,7 @@ function stretchers(): MemberEntry[] {
 }
 
 function feet(): MemberEntry[] {
-  const bun = zoneEntry('Bun', giltOnOil);
+  const bun = zoneEntry('Bun', { ...giltOnOil, relief: 'middle' });
   const ring = zoneEntry('Ring', sealedSilver);
   return [
     memberEntry(

@@ -4,6 +4,7 @@ import { estimateWork, type EstimateWork } from '#shared/estimates/estimate-work
 import type { CostFigures, Figures, PurchaseFigures } from '#shared/estimates/figures';
 import { overlappingAlternatives } from '#shared/estimates/alternatives-overlapping';
 import { emptyAlternatives } from '#shared/estimates/is-empty-alternative';
+import { ornamentZoneFindings } from '#shared/estimates/ornament-zone-findings';
 import { agreedSum } from '#shared/estimates/price/agreed-sum';
 import { directCost } from '#shared/estimates/price/direct-cost';
 import { priceOf } from '#shared/estimates/price/price-of';
@@ -139,7 +140,12 @@ export function estimateFigures(prepared: PreparedEstimate, risk: Risk | null): 
   const worked = workFigures(work, draft.settings, input.card);
   return {
     ...worked,
-    findings: [...worked.findings, ...emptyAlternatives(input.draft), ...overlappingAlternatives(input.draft)],
+    findings: [
+      ...worked.findings,
+      ...ornamentZoneFindings(work.members, input.draft, input.card),
+      ...emptyAlternatives(input.draft),
+      ...overlappingAlternatives(input.draft),
+    ],
     price: price.client,
     stages: stagePayments(price.client.gross_minor, { deposit_percent, stages_percent, retention_percent }),
     cost: costFigures(prepared, price, risk),

@@ -35,6 +35,10 @@ export const carving = {
     'At {size_mm} the ornament is less than half or more than twice its reference of {reference_mm}; the hours are a long way from anything timed.',
   'carving-stretch-outside':
     'Whole repeats come to {pitch_mm} each, {stretch_percent} off the module; more than {tolerance_percent} shows to the eye.',
+  'carving-in-no-zone':
+    '{ornament} stands in no zone of {member}: recutting, leaf and hands-on work there go by the plain surface.',
+  'carving-zone-flat':
+    '{ornament} on {member} stands in the zone “{zone}”, whose relief is flat: its true surface is then taken as flat.',
   'carving-wood-dust':
     'Wood dust, of soft and hard timber alike, is known to cause cancer (IARC Group 1). Extract it at the source and wear a mask. Follow local codes and the product’s safety data sheet; ask a licensed professional.',
   'carving-run-taken': 'The mitre leaves and the centrepiece are longer than the run.',
