@@ -1,6 +1,7 @@
 import { type ComponentFixture, TestBed } from '@angular/core/testing';
 import { ActivatedRoute, convertToParamMap, provideRouter } from '@angular/router';
 import { BehaviorSubject, map } from 'rxjs';
+import type { OrnamentExtent } from '#shared/carving/ornament-use';
 import type { MemberOrnament } from '#shared/estimates/member';
 import { ornamentForSpecs } from '#shared/estimates/member-for-specs';
 import type { MouldingShape } from '#shared/measure/moulding-shape';
@@ -256,6 +257,41 @@ describe('MeasurePage', () => {
     store.undo();
     await settle();
     expect(store.members()[1]).toMatchObject({ zones: [], ornaments });
+  });
+
+  describe('an ornament along the run', () => {
+    const run = (given: Partial<Extract<OrnamentExtent, { way: 'run' }>> = {}): OrnamentExtent => ({
+      ...{ way: 'run', run_mm: 1000, runs: 1, mitreLeaf_mm: 0, mitreLeaves: 0, centre_mm: null },
+      ...given,
+    });
+    const lay = (...extents: readonly OrnamentExtent[]) =>
+      server.changeElsewhere(ids.edge, {
+        ornaments: extents.map((extent) => ornamentForSpecs({ id: newId(), ornamentId: 'egg-and-dart', extent })),
+      });
+    const runs_mm = () =>
+      store.members()[0].ornaments.map(({ extent }) => (extent.way === 'run' ? extent.run_mm : undefined));
+
+    it('follows the run of its member while that is typed, and goes back with it', async () => {
+      lay(run(), run({ run_mm: 400 }), run({ runs: 3, mitreLeaf_mm: 40, mitreLeaves: 2 }));
+      await open();
+      for (const text of ['1', '15', '150', '1500']) await type('Length', text);
+      expect(runs_mm()).toEqual([1500, 400, 1500]);
+      expect(shape(ids.edge)).toMatchObject({ length_mm: 1500 });
+      store.undo();
+      await settle();
+      expect(runs_mm()).toEqual([1000, 400, 1000]);
+      expect(shape(ids.edge)).toMatchObject({ length_mm: 1000 });
+    });
+
+    it('stays where mitre leaves leave no room, and where something else was changed', async () => {
+      lay(run({ mitreLeaf_mm: 40, mitreLeaves: 2 }));
+      await open();
+      await type('Length', '70');
+      expect(runs_mm()).toEqual([1000]);
+      await type('Length', '1000');
+      await type('Height', '80');
+      expect(runs_mm()).toEqual([1000]);
+    });
   });
 
   it('moves a zone with Alt and the arrows, keeps the new order and takes it back', async () => {
