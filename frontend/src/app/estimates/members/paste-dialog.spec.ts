@@ -52,6 +52,18 @@ describe('PasteDialog', () => {
     ]);
   });
 
+  it('leaves out a first row that says what the columns are called', () => {
+    paste('Name\tHow many\tLength\tHeight\nFrieze\t2\t860\t120');
+    expect(cells()).toEqual([['Frieze', '2', '860', '120']]);
+    addButton().click();
+    expect(taken?.map(({ name, place }) => [name, place])).toEqual([['Frieze', 100]]);
+  });
+
+  it('knows headings in any writing and where some are missing, and takes a member that only begins like one', () => {
+    paste('NAME\thow many\n\nName of the rail\t1\t400\t40\nHeight\t1\t400\t40');
+    expect(cells().map(([name]) => name)).toEqual(['Name of the rail', 'Height']);
+  });
+
   it('names beside each bad cell what is wrong with it, and takes nothing until all is well', () => {
     paste('Frieze\t2\ta hand\t120\nRail\t1.5\t400\t200 m\n\t1\t400\t1,200');
     expect(cells()).toEqual([

@@ -56,7 +56,14 @@ export class PasteDialog {
   protected readonly rows = computed(() => {
     const reading = { unit: this.formats.lengthUnit(), decimalSign: decimalSign(this.formats.locale()) };
     const lengths = this.lengths().map(({ path }) => path);
-    return pastedMembers(pastedLines(this.text()), { kind: this.kind(), lengths, reading, start: this.start });
+    const headings = this.headings();
+    return pastedMembers(pastedLines(this.text()), {
+      kind: this.kind(),
+      lengths,
+      headings,
+      reading,
+      start: this.start,
+    });
   });
   protected readonly wrong = computed(() => this.rows().filter(({ content }) => content === undefined).length);
 

@@ -4,6 +4,7 @@ import { pastedMembers, type Pasting } from './pasted-members';
 const pasting: Pasting = {
   kind: 'rectangle',
   lengths: ['length_mm', 'height_mm'],
+  headings: ['Name', 'How many', 'Length', 'Height'],
   reading: { unit: 'mm', decimalSign: '.' },
   start: { pieceId: '018f0000-0000-7000-8000-000000000113', place: 100, timberId: 'lime' },
 };

@@ -23,6 +23,8 @@ export interface PastedMember {
 export interface Pasting {
   readonly kind: ShapeKind;
   readonly lengths: readonly string[];
+  /** What the columns are called, so that a line of headings is known as one. */
+  readonly headings: readonly string[];
   readonly reading: LengthReading;
   readonly start: { readonly pieceId: string; readonly place: number; readonly timberId: string };
 }
@@ -73,11 +75,21 @@ function pastedMember(cells: readonly string[], pasting: Pasting): PastedMember 
   };
 }
 
-/** Rows of a spreadsheet as members of one shape: name, count, then its lengths, each as it was typed. */
-export const pastedMembers = (lines: readonly (readonly string[])[], pasting: Pasting): PastedMember[] =>
-  lines
-    .filter((cells) => cells.some((cell) => cell !== ''))
-    .map((cells, index) => {
-      const start = { ...pasting.start, place: pasting.start.place + index * step };
-      return pastedMember(cells, { ...pasting, start });
-    });
+const plain = (text: string): string => text.trim().toLowerCase();
+
+/** Whether a line says nothing but what the columns are called, any of them, in any writing. */
+function isHeading(cells: readonly string[], headings: readonly string[]): boolean {
+  const known = new Set(headings.map(plain));
+  return cells.every((cell) => cell.trim() === '' || known.has(plain(cell)));
+}
+
+/** Rows of a spreadsheet as members of one shape: name, count, then its lengths, each as it was typed. A first row of headings is left out. */
+export function pastedMembers(lines: readonly (readonly string[])[], pasting: Pasting): PastedMember[] {
+  const filled = lines.filter((cells) => cells.some((cell) => cell !== ''));
+  const [first] = filled;
+  const rows = first && isHeading(first, pasting.headings) ? filled.slice(1) : filled;
+  return rows.map((cells, index) => {
+    const start = { ...pasting.start, place: pasting.start.place + index * step };
+    return pastedMember(cells, { ...pasting, start });
+  });
+}
