@@ -1,6 +1,8 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { MatButton } from '@angular/material/button';
 import type { OrnamentWay } from '#shared/carving/ornament';
 import type { OrnamentExtent } from '#shared/carving/ornament-use';
+import { Formats } from '../core/formats/formats';
 import type { AnyDocumentForm } from '../core/forms/document-form';
 import { EntryAt } from '../ui/field/entry-at';
 import { Entry } from '../ui/field/entry';
@@ -18,7 +20,7 @@ const wayNames: Readonly<Record<ExtentWay, string>> = {
 /** How much of an ornament: pieces, runs with their mitre leaves and centrepiece, or an area. Its entries stand in the grid around it. */
 @Component({
   selector: 'app-extent-form',
-  imports: [Entry, EntryAt, Field],
+  imports: [Entry, EntryAt, Field, MatButton],
   changeDetection: ChangeDetectionStrategy.OnPush,
   template: `
     @if (ways().length > 1) {
@@ -55,6 +57,12 @@ const wayNames: Readonly<Record<ExtentWay, string>> = {
           [path]="at('mitreLeaf_mm')"
         />
         <app-entry-at way="length" optional i18n-label label="Centrepiece" [form]="form()" [path]="at('centre_mm')" />
+        @if (otherRun(); as length) {
+          <p class="other">
+            <span i18n>The member’s run is {{ length }}.</span>
+            <button matButton type="button" class="no-print" (click)="takeRun()" i18n>Take it</button>
+          </p>
+        }
       }
     }
   `,
@@ -62,9 +70,15 @@ const wayNames: Readonly<Record<ExtentWay, string>> = {
     :host {
       display: contents;
     }
+
+    .other {
+      grid-column: 1 / -1;
+    }
   `,
 })
 export class ExtentForm {
+  private readonly formats = inject(Formats);
+
   readonly form = input.required<AnyDocumentForm>();
   /** Where the amount stands in the document. */
   readonly path = input.required<string>();
@@ -78,8 +92,19 @@ export class ExtentForm {
   /** What fits the ornament, and what stands there though it does not. */
   protected readonly ways = computed(() => [...new Set([...fittingWays(this.way()), this.kind()])]);
 
+  /** The member's run where one run along it has another length; part of it may be meant, so it is only offered. */
+  protected readonly otherRun = computed(() => {
+    const [extent, run_mm] = [this.form().value<OrnamentExtent>(this.path()), this.memberRun_mm()];
+    const isMeant = extent?.way !== 'run' || extent.runs > 1 || run_mm === 0;
+    return isMeant || Math.abs(extent.run_mm - run_mm) <= run_mm / 100 ? '' : this.formats.length(run_mm);
+  });
+
   protected at(name: string): string {
     return `${this.path()}.${name}`;
+  }
+
+  protected takeRun(): void {
+    this.form().put(this.at('run_mm'), this.memberRun_mm());
   }
 
   protected turn(way: string): void {

@@ -52,7 +52,8 @@ describe('OrnamentForm', () => {
       return (found?.querySelector('input') ?? document_(found?.htmlFor)) as HTMLInputElement;
     };
     const document_ = (id = '') => element.querySelector(`#${id}`);
-    return { fixture, form, labels, entry };
+    const offer = () => element.querySelector('.other') ?? undefined;
+    return { fixture, form, labels, entry, offer };
   }
 
   it('takes a run with all it has, and gives plain millimetres', async () => {
@@ -70,6 +71,22 @@ describe('OrnamentForm', () => {
     centre.dispatchEvent(new Event('input'));
     await fixture.whenStable();
     expect(form.parsed()?.use.extent).toMatchObject({ run_mm: 2860, centre_mm: 60 });
+  });
+
+  it('offers the run of the member where the ornament’s is another, and leaves what is meant in peace', async () => {
+    const { form, offer, fixture } = await open();
+    expect(offer()).toBeUndefined();
+    form.put('use.extent.run_mm', 1900);
+    await fixture.whenStable();
+    expect(offer()?.querySelector('span')?.textContent).toMatch(/^The member’s run is 2860\smm\.$/);
+    offer()?.querySelector('button')?.click();
+    await fixture.whenStable();
+    expect(form.parsed()?.use.extent).toMatchObject({ run_mm: 2860 });
+    expect(offer()).toBeUndefined();
+    // Flutes side by side have a length of their own.
+    form.put('use.extent', { ...use.extent, run_mm: 440, runs: 12 });
+    await fixture.whenStable();
+    expect(offer()).toBeUndefined();
   });
 
   it('asks of work done once neither relief nor size nor plan', async () => {
