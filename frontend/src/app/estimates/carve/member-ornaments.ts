@@ -1,5 +1,6 @@
 import { Injectable, computed, inject, signal } from '@angular/core';
 import type { MemberOrnament, Zone } from '#shared/estimates/member';
+import { ornamentRuns } from '#shared/measure/ornament-runs';
 import { type CatalogueEntry, foundEntries, ornamentCatalogue } from '../../carving';
 import { newId } from '../../core/new-id';
 import type { EditedCell, MovedRow, PastedCells } from '../../ui/table/figure-column';
@@ -94,10 +95,12 @@ export class MemberOrnaments {
   }
 
   private insert(entries: readonly CatalogueEntry[]): void {
-    const zoneIds = this.zones().map(({ id }) => id);
+    const member = this.selection.member();
+    if (!member) return;
+    const start = { along: ornamentRuns(member.shape), zoneIds: this.zones().map(({ id }) => id) };
     for (const entry of entries) {
       const id = newId();
-      this.form.insert('ornaments', this.rows().length, newOrnament(entry, { id, run_mm: this.run_mm(), zoneIds }));
+      this.form.insert('ornaments', this.rows().length, newOrnament(entry, { id, ...start }));
       this.choose(id);
     }
   }
