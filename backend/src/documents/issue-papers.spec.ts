@@ -1,8 +1,9 @@
 import sharp from 'sharp';
-import type { Alternative, ExtraLine } from '#shared/estimates/settings';
+import type { Alternative, EstimateSettings, ExtraLine } from '#shared/estimates/settings';
 import type { Snapshot } from '#shared/estimates/snapshot';
+import { shapeDefaults } from '#shared/measure/shape-defaults';
 import { factsOf, leaveSample, pagesOf, tagsOf, textOfPaper } from '../../../test/documents/paper-text';
-import { longDraft, smallDraft, zone } from '../../../test/documents/sample-draft';
+import { longDraft, member, smallDraft, zone } from '../../../test/documents/sample-draft';
 import { sampleSnapshot } from '../../../test/documents/sample-snapshot';
 import type { PaperFile } from '../estimates';
 import { issuePapers } from './issue-papers';
@@ -155,6 +156,31 @@ describe('the estimate as a paper', () => {
     const text = textOfPaper(await estimateOf({ ...full, alternatives }));
     expect(text).toContain('Total with it');
     expect(text).not.toContain('Ready in');
+  });
+
+  describe('what is included and what is not', () => {
+    const bare = member('bare', { name: 'Back rail', shape: shapeDefaults('box'), zones: [] });
+    const withBare = (rest: Partial<EstimateSettings>) => {
+      const { settings, pieces, members } = smallDraft(rest);
+      return sampleSnapshot({ settings, pieces, members: [...members, bare] });
+    };
+    const said = async (snapshot: Snapshot) => textOfPaper(await estimateOf(snapshot)).replace(/\s+/g, ' ');
+
+    it('is said from the lines of the price where nobody wrote it', async () => {
+      const text = await said(sampleSnapshot(smallDraft({ included: '', excluded: ' ' })));
+      expect(text).toMatch(/Included .*Carving.*Gilding.*: what the lines above name, and no more\./);
+      expect(text).toContain('Not included Whatever this paper does not name.');
+      expect(text).not.toContain('Measured only');
+    });
+
+    it('names a member that nobody works, and draws it not', async () => {
+      const text = await said(withBare({ excluded: 'The marble top.' }));
+      expect(text).toContain(
+        'Not included Measured only, with no work on it in this price: Back rail. The marble top.',
+      );
+      expect(text.match(/Back rail/g)).toHaveLength(1);
+      expect(text).toContain('Carving, ground, gilding and toning as described.');
+    });
   });
 
   it('speaks of tax included only where there is some', async () => {

@@ -81,6 +81,9 @@ export const documents = {
     'Prices of leaf hold until {day}. Leaf ordered later is charged at the price of its day; nothing else changes.',
   'paper-included': 'Included',
   'paper-excluded': 'Not included',
+  'paper-included-kinds': '{kinds}: what the lines above name, and no more.',
+  'paper-measured-only': 'Measured only, with no work on it in this price: {names}.',
+  'paper-excluded-rest': 'Whatever this paper does not name.',
 
   'paper-drawings': 'Drawings',
   'paper-drawings-note':

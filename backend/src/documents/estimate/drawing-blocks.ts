@@ -7,7 +7,7 @@ import type { Pdf } from '../paper/open-paper';
 import { textStyles } from '../paper/paper-colours';
 import { sectionBlocks } from '../paper/section-blocks';
 import { textBlock } from '../paper/text-block';
-import type { IssueContent } from './issue-content';
+import { type IssueContent, unworkedOf } from './issue-content';
 
 /** A note that stays with the row beneath it. */
 function noted(pdf: Pdf, note: string, rows: readonly Block[]): Block[] {
@@ -16,10 +16,13 @@ function noted(pdf: Pdf, note: string, rows: readonly Block[]): Block[] {
   return [{ ...text, lead_pt: text.lead_pt + rows[0].lead_pt }, ...rows];
 }
 
-/** The members drawn to scale, three abreast. */
-export function memberDrawingBlocks(pdf: Pdf, { draft, words }: IssueContent): Block[] {
+/** The members that are worked, drawn to scale, three abreast. */
+export function memberDrawingBlocks(pdf: Pdf, content: IssueContent): Block[] {
+  const { draft, words } = content;
+  const unworked = unworkedOf(content);
+  const members = draft.members.filter((member) => !unworked.includes(member));
   const box = { width_pt: figureWidth(pdf, 3), height_pt: 150 };
-  const figures = drawnMembers(pdf, draft.members, { box, words, isForTheBench: false });
+  const figures = drawnMembers(pdf, members, { box, words, isForTheBench: false });
   const rows = figureRows(pdf, figures, 3);
   return sectionBlocks(pdf, words.say('paper-drawings'), noted(pdf, words.say('paper-drawings-note'), rows));
 }

@@ -18,6 +18,7 @@ import { paperNames, titleOf } from './paper-names';
 import { paymentBlocks } from './payment-blocks';
 import { priceTable } from './price-table';
 import { programmeBlocks } from './programme-blocks';
+import { scopeBlocks } from './scope-blocks';
 import { timeBlocks } from './time-blocks';
 
 function addressOf(pdf: Pdf, { snapshot, words, taxed }: IssueContent): Block {
@@ -51,7 +52,7 @@ function introduction(pdf: Pdf, content: IssueContent): Block[] {
 
 function estimateBlocks(pdf: Pdf, content: IssueContent, logo: Buffer | null): Block[] {
   const { snapshot, draft, words } = content;
-  const { included, excluded, terms } = draft.settings;
+  const { terms } = draft.settings;
   return [
     letterheadBlock({ workshop: snapshot.workshop, logo: printableLogo(pdf, logo), words }),
     addressOf(pdf, content),
@@ -59,8 +60,7 @@ function estimateBlocks(pdf: Pdf, content: IssueContent, logo: Buffer | null): B
     ...introduction(pdf, content),
     ...sectionBlocks(pdf, words.say('paper-lines'), [priceTable(pdf, content)]),
     ...alternativesBlocks(pdf, content),
-    ...textSection(pdf, content, ['paper-included', included]),
-    ...textSection(pdf, content, ['paper-excluded', excluded]),
+    ...scopeBlocks(pdf, content),
     ...timeBlocks(pdf, content),
     ...programmeBlocks(pdf, content),
     ...paymentBlocks(pdf, content),
