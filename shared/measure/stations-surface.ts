@@ -1,8 +1,8 @@
-import { simpson } from '#shared/geometry/simpson';
 import { slopesAt } from '#shared/geometry/slopes-at';
-import { unevenSimpson, type Sample } from '#shared/geometry/uneven-simpson';
+import type { Sample } from '#shared/geometry/uneven-simpson';
 import { flutedSurface } from '#shared/measure/fluted-surface';
 import type { CabrioleShape, StationsShape } from '#shared/measure/leg-shape';
+import { girthsArea, type GirthsArea } from '#shared/measure/girths-area';
 import { because, madeSurface } from '#shared/measure/made-surface';
 import type { Surface } from '#shared/measure/surface';
 
@@ -18,20 +18,27 @@ function coarser(samples: readonly Sample[]): Sample[] {
   return samples.length % 2 === 0 ? [...kept, samples[samples.length - 1]] : kept;
 }
 
-// |S(h) − S(2h)|/15; with three stations the coarser rule is the trapezium between the ends, which converges more slowly: /3.
-function uncertaintyOf(area_mm2: number, values: readonly Sample[]): number {
-  const coarse = coarser(values);
-  return Math.abs(area_mm2 - unevenSimpson(coarse)) / (coarse.length > 2 ? 15 : 3);
+// |S(h) − S(2h)|/15; where the coarser one is the trapezium between the ends, or frusta, it converges more slowly: /3.
+function uncertaintyOf(
+  { area_mm2, doubt_mm2 }: GirthsArea,
+  girths: readonly Sample[],
+  values: readonly Sample[],
+): number {
+  const coarse = girthsArea(coarser(girths), coarser(values));
+  const isSlow = girths.length <= 3 || coarse.hasFrusta;
+  return Math.max(doubt_mm2, Math.abs(area_mm2 - coarse.area_mm2) / (isSlow ? 3 : 15));
 }
 
 const lengthOf = (samples: readonly Sample[]) =>
   samples.length === 0 ? 0 : samples[samples.length - 1].at - samples[0].at;
 
-function stationsSurface(samples: readonly Sample[], rule: (values: readonly Sample[]) => number): Surface {
+function stationsSurface(samples: readonly Sample[]): Surface {
   const run_mm = lengthOf(samples);
-  const values = run_mm === 0 ? [] : widened(samples);
-  const area_mm2 = run_mm === 0 ? 0 : rule(values);
-  const uncertainty_mm2 = run_mm === 0 ? 0 : uncertaintyOf(area_mm2, values);
+  const girths = run_mm === 0 ? [] : samples;
+  const values = widened(girths);
+  const area = girthsArea(girths, values);
+  const { area_mm2 } = area;
+  const uncertainty_mm2 = run_mm === 0 ? 0 : uncertaintyOf(area, girths, values);
   const girth_mm = run_mm === 0 ? 0 : area_mm2 / run_mm;
   return madeSurface({
     area_mm2,
@@ -56,20 +63,9 @@ function stationsSurface(samples: readonly Sample[], rule: (values: readonly Sam
 export function cabrioleSurface({ length_mm, girths_mm, fluting }: CabrioleShape): Surface {
   const step_mm = length_mm / (girths_mm.length - 1);
   const samples = girths_mm.map((value, index) => ({ at: index * step_mm, value }));
-  const even = (values: readonly Sample[]) =>
-    simpson(
-      values.map(({ value }) => value),
-      step_mm,
-    );
-  return flutedSurface(stationsSurface(samples, even), fluting);
+  return flutedSurface(stationsSurface(samples), fluting);
 }
 
 /** The surface of a member by girths at uneven stations, in mm and mm², by Simpson's rule for uneven spaces. */
 export const unevenStationsSurface = ({ stations, fluting }: StationsShape): Surface =>
-  flutedSurface(
-    stationsSurface(
-      stations.map(({ at_mm, girth_mm }) => ({ at: at_mm, value: girth_mm })),
-      unevenSimpson,
-    ),
-    fluting,
-  );
+  flutedSurface(stationsSurface(stations.map(({ at_mm, girth_mm }) => ({ at: at_mm, value: girth_mm }))), fluting);
