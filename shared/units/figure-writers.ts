@@ -10,18 +10,26 @@ import type { WordCode } from '#shared/words/word-code';
 
 type Write = (figure: number) => string;
 
-function moneyWriter({ settings: { locale, currency, digits } }: Pen): Write {
-  const decimals = { minimumFractionDigits: digits, maximumFractionDigits: digits };
-  const format = new Intl.NumberFormat(locale, { style: 'currency', currency, numberingSystem: 'latn', ...decimals });
+function amountFormat({ settings }: Pen, mostDigits: number): Intl.NumberFormat {
+  const { locale, currency, digits, currencyDisplay } = settings;
+  return new Intl.NumberFormat(locale, {
+    ...{ style: 'currency', currency, currencyDisplay, numberingSystem: 'latn' },
+    ...{ minimumFractionDigits: digits, maximumFractionDigits: mostDigits },
+  });
+}
+
+function moneyWriter(pen: Pen): Write {
+  const { digits } = pen.settings;
+  const format = amountFormat(pen, digits);
   // A decimal text is formatted digit by digit; as a number, sums above 45 million million minor units could lose one.
   const exact = (amount: number) => format.format(textOf(amount, digits) as unknown as number);
   return (figure) => trueMinus(Number.isSafeInteger(figure) ? exact(figure) : format.format(figure / 10 ** digits));
 }
 
 /** What an hour costs, in minor units, with every decimal it has: rounded, hours × rate would not come to the cost beside it. */
-function rateWriter({ settings: { locale, currency, digits } }: Pen): Write {
-  const decimals = { minimumFractionDigits: digits, maximumFractionDigits: digits + 6 };
-  const format = new Intl.NumberFormat(locale, { style: 'currency', currency, numberingSystem: 'latn', ...decimals });
+function rateWriter(pen: Pen): Write {
+  const { digits } = pen.settings;
+  const format = amountFormat(pen, digits + 6);
   return (figure) => trueMinus(format.format(new D(figure).div(10 ** digits).toFixed() as unknown as number));
 }
 

@@ -18,8 +18,8 @@ const known = new Remembered<ValueFormats>(100);
  * litres, leaves, booklets, packs, pieces, factor, divisor; any other ending is a plain number. Decimals of money never come from Intl.
  */
 export function formatsFor(settings: ReaderSettings): ValueFormats {
-  const { locale, currency, digits, lengthUnit, catalogue } = settings;
+  const { locale, currency, digits, lengthUnit, catalogue, currencyDisplay = '' } = settings;
   if (catalogue) return formatsOf(settings);
-  const key = [locale, currency, digits, lengthUnit].join(' ');
+  const key = [locale, currency, digits, lengthUnit, currencyDisplay].join(' ');
   return known.of(key, () => formatsOf(settings));
 }

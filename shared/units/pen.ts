@@ -11,6 +11,8 @@ export interface ReaderSettings {
   readonly digits: number;
   readonly lengthUnit: LengthUnit;
   readonly catalogue?: Catalogue;
+  /** How amounts name their currency: by its sign unless it is to be its ISO 4217 code. */
+  readonly currencyDisplay?: 'code';
 }
 
 /** What figures are written with. */

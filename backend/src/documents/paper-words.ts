@@ -4,7 +4,7 @@ import { currencyDigits } from '#shared/money/currency-digits';
 import type { MinorUnits } from '#shared/money/decimal';
 import { formatsFor } from '#shared/units/formats-for';
 import { en } from '#shared/words/en';
-import { say } from '#shared/words/say';
+import { say, type ValueFormats } from '#shared/words/say';
 import { unprintedLetters } from '#shared/words/unprinted-letters';
 import type { WordCode, WordValues } from '#shared/words/word-code';
 
@@ -29,11 +29,18 @@ function printedDay(day: string, locale: string): string {
   return unprintedLetters(written).length === 0 ? written : formatDay(day, languageOf(locale));
 }
 
+/** Figures as the workshop writes them; amounts bear their currency's code where the fonts of the papers lack its sign. */
+function printedFormats({ locale, currency, lengthUnit }: SnapshotWorkshop): ValueFormats {
+  const settings = { locale, currency, lengthUnit, digits: currencyDigits(currency) };
+  const formats = formatsFor(settings);
+  const isPrinted = unprintedLetters(formats.write('minor', -1)).length === 0;
+  return isPrinted ? formats : formatsFor({ ...settings, currencyDisplay: 'code' });
+}
+
 /** The words of a workshop's papers. */
 export function paperWords(workshop: SnapshotWorkshop): PaperWords {
-  const { locale, currency, lengthUnit } = workshop;
-  const formats = formatsFor({ locale, currency, lengthUnit, digits: currencyDigits(currency) });
-  const language = languageOf(locale);
+  const formats = printedFormats(workshop);
+  const language = languageOf(workshop.locale);
   return {
     language,
     say: say(en, formats),
