@@ -3,8 +3,6 @@ import type { Member } from '#shared/estimates/member';
 import { draftForSpecs, memberForSpecs, ornamentForSpecs, zoneEntryForSpecs } from '#shared/estimates/member-for-specs';
 import type { EstimateSettings } from '#shared/estimates/settings';
 import { startCard } from '#shared/rate-cards/start-card';
-import { demonstrationDraft } from '../../seeders/demonstration-draft';
-import { demonstrationJobs } from '../../seeders/demonstration-jobs';
 
 const told = (draft: ReturnType<typeof draftForSpecs>, choice: readonly string[] = []) =>
   estimateFigures(prepareEstimate({ draft, choice, card: startCard, currency: 'EUR' }), null)
@@ -65,9 +63,5 @@ describe('ornamentZoneFindings', () => {
     const zones = [zoneEntryForSpecs({ relief: 'middle' }), other];
     const draft = of({ zones, ornaments: [ornamentForSpecs({ zoneId: 'zone' })] }, { alternatives });
     expect([told(draft), told(draft, ['oil'])]).toEqual([[], []]);
-  });
-
-  it('has nothing to tell of the demonstration', () => {
-    expect(demonstrationJobs().map((job) => told(demonstrationDraft(job, startCard)))).toEqual([[], [], []]);
   });
 });
