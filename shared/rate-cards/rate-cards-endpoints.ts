@@ -73,12 +73,13 @@ export const removeRateCard = endpoint({
 
 export const readCardDifferences = endpoint({
   name: 'readCardDifferences',
-  summary: 'Line by line, what a card changes against the one in force, the one it was copied from, or another.',
+  summary:
+    'Line by line, what a card changes against the one it takes over from, a draft as if it began today or on a day, or against another.',
   method: 'get',
   path: '/api/rate-cards/:rateCardId/differences',
   callers: ['owner', 'estimator'],
   params: oneCard,
-  query: z.strictObject({ against: identifier.optional() }),
+  query: z.strictObject({ against: identifier.optional(), from: day.optional() }),
   answers: {
     cost: z.strictObject({ against: rateCardSummarySchema, differences: z.array(cardDifferenceSchema) }),
   },

@@ -230,6 +230,21 @@ describe('A card put in force', () => {
     expect((await cardInForce(api.ours)).id).toBe(before.id);
   });
 
+  it('is what a draft for a day after that is compared with; it is compared with the one before it', async () => {
+    const before = await cardInForce(api.ours);
+    const next = await draftCard(api.ours, 'The month after');
+    await putFrom(next, 75);
+    const draft = await draftCard(api.ours);
+    const against = async (rateCardId: string, days: number) => {
+      const query = { from: await dayAhead(api.ours, api, days) };
+      const { body } = await owner.call(readCardDifferences, { params: { rateCardId }, query });
+      return (body as { against: RateCardSummary }).against.id;
+    };
+    expect(await Promise.all([against(draft.id, 0), against(draft.id, 75)])).toEqual([before.id, next.id]);
+    expect(await against(next.id, 0)).not.toBe(next.id);
+    expect(await against(before.id, 75)).toBe(before.id);
+  });
+
   it('may be asked for twice', async () => {
     const draft = await draftCard(api.ours);
     const [first, second] = [await putFrom(draft, 31), await putFrom(draft, 31)];

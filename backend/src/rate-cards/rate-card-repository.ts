@@ -21,10 +21,13 @@ export class RateCardRepository extends WorkshopRows<RateCardRow> {
   }
 
   /** The card in force on a day: the latest of those that began by then. */
-  async inForce(workshopId: string, day: string): Promise<RateCardRow | undefined> {
-    const where = { inForceFrom: { [Op.lte]: day } };
-    const [row] = await this.list(workshopId, { where, order: [['inForceFrom', 'DESC']], limit: 1 });
-    return row;
+  inForce(workshopId: string, day: string): Promise<RateCardRow | undefined> {
+    return this.latest(workshopId, { inForceFrom: { [Op.lte]: day } });
+  }
+
+  /** The card in force until the day another begins. */
+  before(workshopId: string, day: string): Promise<RateCardRow | undefined> {
+    return this.latest(workshopId, { inForceFrom: { [Op.lt]: day } });
   }
 
   /** The card in force on a day, without its content. */
@@ -63,6 +66,11 @@ export class RateCardRepository extends WorkshopRows<RateCardRow> {
     change: Partial<Pick<RateCardRow, 'name' | 'content' | 'inForceFrom' | 'changedAt'>>,
   ): Promise<RateCardRow> {
     return this.change(workshopId, { id, version }, change);
+  }
+
+  private async latest(workshopId: string, where: WhereOptions<RateCardRow>): Promise<RateCardRow | undefined> {
+    const [row] = await this.list(workshopId, { where, order: [['inForceFrom', 'DESC']], limit: 1 });
+    return row;
   }
 
   private async heads(

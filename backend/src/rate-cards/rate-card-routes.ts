@@ -47,7 +47,7 @@ const readingRoutes = (cards: RateCardService): Route[] => [
     return presentWholeRateCard(row, await cards.cardsToday(actor.workshopId));
   }),
   mount(readCardDifferences, async ({ actor, params, query }) => {
-    const { against, differences } = await cards.differences(actor.workshopId, params.rateCardId, query.against);
+    const { against, differences } = await cards.differences(actor.workshopId, params.rateCardId, query);
     return { against: presentRateCard(against, await cards.cardsToday(actor.workshopId)), differences };
   }),
 ];

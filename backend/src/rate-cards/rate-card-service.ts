@@ -21,6 +21,12 @@ interface Parts {
   readonly clock: Clock;
 }
 
+/** Which card another is held against: one by its id, or the one in force when it would begin. */
+interface Against {
+  readonly against?: string | undefined;
+  readonly from?: string | undefined;
+}
+
 /** Two cards line by line. */
 export interface ComparedCards {
   readonly against: RateCardRow;
@@ -74,13 +80,22 @@ export class RateCardService {
     return (await this.get(workshopId, id)).content;
   }
 
-  /** What a card changes against another; without one named, against the card in force, and of that against its model. */
-  async differences(workshopId: string, id: string, againstId?: string): Promise<ComparedCards> {
+  /** What a card changes against another; without one named, against the card it takes over from: a draft as if it began on a day. */
+  async differences(workshopId: string, id: string, { against: againstId, from }: Against): Promise<ComparedCards> {
     const card = await this.get(workshopId, id);
-    const inForce = await this.inForce(workshopId);
-    const model = inForce.id === id ? (card.basedOnId ?? id) : inForce.id;
-    const against = await this.get(workshopId, againstId ?? model);
+    const against = againstId
+      ? await this.get(workshopId, againstId)
+      : await this.predecessor(card, from ?? (await this.today(workshopId)));
     return { against, differences: cardDifferences(against.content, card.content) };
+  }
+
+  /** The card in force until one begins; the first of all has none but itself. */
+  private async predecessor(card: RateCardRow, from: string): Promise<RateCardRow> {
+    const { cards } = this.parts;
+    const { workshopId, inForceFrom } = card;
+    const found =
+      inForceFrom === null ? await cards.inForce(workshopId, from) : await cards.before(workshopId, inForceFrom);
+    return found ?? card;
   }
 
   private async plantStartCard(by: Doer): Promise<void> {

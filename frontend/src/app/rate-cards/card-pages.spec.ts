@@ -50,6 +50,7 @@ class CardsServer {
   ];
   readonly asked: string[] = [];
   readonly kept: CardEntries[] = [];
+  readonly comparedFrom: string[] = [];
   fill = jest.fn<Promise<RateCardSummary>, [SeenCard, File]>();
 
   of = (cardId: string): WholeRateCard => this.cards.find((card) => card.id === cardId) ?? whole({ id: cardId });
@@ -68,7 +69,8 @@ class CardsServer {
       version: version + 1,
     });
   };
-  differences = (cardId: string) => {
+  differences = (cardId: string, from: string) => {
+    this.comparedFrom.push(from);
     const [against, card] = [this.of(inForceId), this.of(cardId)];
     return Promise.resolve({
       against: summaryOf(against),
@@ -144,6 +146,14 @@ describe('The pages of rate cards', () => {
     expect(server.asked).toEqual([`copy ${inForceId}`]);
     expect(server.cards.at(-1)?.name).toBe('Rates of 2 Mar 2026');
     expect(TestBed.inject(Router).url).toBe(`/rates/${server.cards.at(-1)?.id}/labour`);
+  });
+
+  it('name a second draft of one day apart from the first', async () => {
+    await open('/rates');
+    server.cards.push(whole({ id: id(43), name: 'Rates of 2 Mar 2026' }));
+    button('Change the rates')?.click();
+    await settle();
+    expect(server.cards.at(-1)?.name).toBe('Rates of 2 Mar 2026, 2');
   });
 
   it('let an estimator read and change nothing', async () => {
@@ -280,10 +290,23 @@ describe('The pages of rate cards', () => {
     day.dispatchEvent(new Event('input'));
     await settle();
     expect(button(/Put in force/)?.textContent?.trim()).toBe('Put in force from 1 Apr 2026');
+    expect(server.comparedFrom).toEqual(['2026-03-02', '2026-04-01']);
     button(/Put in force/)?.click();
     await settle();
     expect([confirm.ask.mock.calls.length, server.asked]).toEqual([1, ['in force 2026-04-01']]);
     expect(text()).toContain('set for a day');
+  });
+
+  it('tell of a day that is past beside it, and ask nothing', async () => {
+    await open(`/rates/${draftId}/changes`);
+    const day = element().querySelector<HTMLInputElement>('input[type="date"]')!;
+    day.value = '2026-03-01';
+    day.dispatchEvent(new Event('input'));
+    await settle();
+    button(/Put in force/)?.click();
+    await settle();
+    expect(text()).toContain('A rate card begins today or later.');
+    expect([confirm.ask.mock.calls.length, server.asked, server.comparedFrom]).toEqual([0, [], ['2026-03-02']]);
   });
 
   it('name every cell of a workbook that could not be taken', async () => {

@@ -1,6 +1,17 @@
-import { ChangeDetectionStrategy, Component, computed, effect, inject, resource, untracked } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  effect,
+  inject,
+  resource,
+  signal,
+  untracked,
+} from '@angular/core';
 import { MatButton } from '@angular/material/button';
+import { dayOfInstant } from '#shared/calendar/day-of-instant';
 import { Formats } from '../core/formats/formats';
+import { NOW } from '../core/now';
 import { Session } from '../core/session/session';
 import { EmptyState } from '../ui/page/empty-state';
 import { Skeleton } from '../ui/page/skeleton';
@@ -26,9 +37,12 @@ export class ChangesPage {
   private readonly session = inject(Session);
   private readonly saving = inject(CardSaving);
   private readonly formats = inject(Formats);
+  private readonly now = inject(NOW);
   protected readonly store = inject(CardStore);
   protected readonly effects = inject(CardEffectsStore);
 
+  /** The day a draft would begin: it is compared with the card that is in force then. */
+  protected readonly from = signal(dayOfInstant(this.now().getTime(), this.formats.timeZone()));
   /** The card as the server has it: both figures and differences are of what is kept. */
   private readonly kept = computed(
     () => {
@@ -38,9 +52,12 @@ export class ChangesPage {
     { equal: (one, other) => one?.id === other?.id && one?.version === other?.version },
   );
   private readonly fetched = resource({
-    params: () => this.kept(),
+    params: () => {
+      const kept = this.kept();
+      return kept && { ...kept, from: this.from() };
+    },
     loader: async ({ params, abortSignal }) => {
-      const { against, differences } = await this.calls.differences(params.id, abortSignal);
+      const { against, differences } = await this.calls.differences(params.id, params.from, abortSignal);
       return { against, differences, before: (await this.calls.read(against.id, abortSignal)).content };
     },
   });

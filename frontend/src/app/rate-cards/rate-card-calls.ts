@@ -68,8 +68,9 @@ export class RateCardCalls {
     await this.api.call(removeRateCard, at(seen));
   }
 
-  differences(id: string, signal: AbortSignal): Promise<ComparedCards> {
-    return this.api.call(readCardDifferences, { ...of(id), query: {}, signal });
+  /** A draft is compared as if it began on a day. */
+  differences(id: string, from: string, signal: AbortSignal): Promise<ComparedCards> {
+    return this.api.call(readCardDifferences, { ...of(id), query: { from }, signal });
   }
 
   workEffects(id: string): Promise<CardEffectsAnswer> {

@@ -15,8 +15,18 @@ export class StartCopy {
 
   async of(cardId: string): Promise<void> {
     const id = newId();
-    const day = this.formats.dayOf(this.now());
-    await this.calls.copy(cardId, { id, name: $localize`Rates of ${day}:day:` });
+    await this.calls.copy(cardId, { id, name: await this.freeName() });
     await this.router.navigate(['/rates', id]);
+  }
+
+  /** After the day; a second of the same day is numbered. */
+  private async freeName(): Promise<string> {
+    const day = this.formats.dayOf(this.now());
+    const { items } = await this.calls.list(undefined, new AbortController().signal);
+    const taken = new Set(items.map(({ name }) => name));
+    const names = Array.from({ length: taken.size + 1 }, (_, place) =>
+      place === 0 ? $localize`Rates of ${day}:day:` : $localize`Rates of ${day}:day:, ${place + 1}:number:`,
+    );
+    return names.find((name) => !taken.has(name)) ?? names[0];
   }
 }
