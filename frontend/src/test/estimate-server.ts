@@ -16,7 +16,7 @@ import { startCard } from '#shared/rate-cards/start-card';
 import { ProblemError } from '../app/core/problems/problem-error';
 import type { Conflict, Side } from '../app/estimates/draft/conflict';
 import { STALE_CHOICE } from '../app/estimates/draft/stale-choice';
-import { EstimateClient } from '../app/estimates/estimate-client';
+import { EstimateClient, type KnownCard } from '../app/estimates/estimate-client';
 import { FIGURES_REPORT } from '../app/estimates/figures/figures-report';
 import { RISK_STARTER } from '../app/estimates/figures/risk-starter';
 import { workspaceProviders } from '../app/estimates/workspace/workspace-providers';
@@ -118,6 +118,7 @@ export class EstimateServer implements Pick<EstimateClient, Served> {
   version = 1;
   currency = 'EUR';
   rateCardId: string = ids.card;
+  basedOnId: string | null = id(16);
   totals: readonly AlternativeTotal[] = [];
   /** Every list of changes that arrived. */
   readonly arrived: (readonly Change[])[] = [];
@@ -125,7 +126,6 @@ export class EstimateServer implements Pick<EstimateClient, Served> {
   readonly failures: (ProblemError | undefined)[] = [];
   /** Requests wait for this. */
   gate: Promise<void> = Promise.resolve();
-  /** Whether whoever asks may see money. */
   isPriced = true;
   /** Told to work figures wrongly. */
   spoil: (figures: Figures) => Figures = (figures) => figures;
@@ -172,7 +172,7 @@ export class EstimateServer implements Pick<EstimateClient, Served> {
   }
 
   alternatives = () => Promise.resolve(this.totals);
-  card = () => Promise.resolve(startCard);
+  card = () => Promise.resolve({ content: startCard as KnownCard['content'], basedOnId: this.basedOnId });
   job = () =>
     Promise.resolve({ title: 'Pier table, paired herons' } as unknown as Awaited<ReturnType<EstimateClient['job']>>);
   issues = (): Promise<readonly PricedIssueSummary[]> => Promise.resolve([]);

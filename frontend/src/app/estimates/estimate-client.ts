@@ -14,10 +14,12 @@ import type { PricedIssueSummary } from '#shared/estimates/issue-schema';
 import { listIssues } from '#shared/estimates/issues-endpoints';
 import type { Job } from '#shared/jobs/job-schema';
 import { readJob } from '#shared/jobs/jobs-endpoints';
-import type { RateCard } from '#shared/rate-cards/rate-card';
-import { readRateCard } from '#shared/rate-cards/rate-cards-endpoints';
+import { readRateCard, type WholeRateCard } from '#shared/rate-cards/rate-cards-endpoints';
 import { Api } from '../core/api/api';
 import type { ReadEstimate } from './draft/read-estimate';
+
+/** A card an estimate is worked on, and the one it was copied from: none for the card a workshop was founded with. */
+export type KnownCard = Pick<WholeRateCard, 'content' | 'basedOnId'>;
 
 /** The calls the workspace of an estimate makes. */
 @Injectable({ providedIn: 'root' })
@@ -32,8 +34,8 @@ export class EstimateClient {
     return this.api.call(readJob, { params: { jobId }, signal });
   }
 
-  async card(rateCardId: string, signal: AbortSignal): Promise<RateCard> {
-    return (await this.api.call(readRateCard, { params: { rateCardId }, signal })).content;
+  card(rateCardId: string, signal: AbortSignal): Promise<KnownCard> {
+    return this.api.call(readRateCard, { params: { rateCardId }, signal });
   }
 
   async issues(estimateId: string, signal: AbortSignal): Promise<readonly PricedIssueSummary[]> {

@@ -57,7 +57,9 @@ export class EstimateStore {
 
   readonly job = computed(() => (this.jobRead.hasValue() ? this.jobRead.value() : undefined));
   readonly currency = computed(() => this.known()?.currency);
-  readonly card = computed(() => (this.cardRead.hasValue() ? this.cardRead.value() : undefined));
+  readonly card = computed(() => (this.cardRead.hasValue() ? this.cardRead.value().content : undefined));
+  /** Nobody has made the rates the workshop's own: it is worked on the card the workshop was founded with. */
+  readonly isCardFounding = computed(() => this.cardRead.hasValue() && this.cardRead.value().basedOnId === null);
   /** The newest first. */
   readonly issues = computed(() => (this.issuesRead.hasValue() ? this.issuesRead.value() : []));
 
@@ -177,7 +179,6 @@ export class EstimateStore {
     if (answer) this.hear(answer);
   }
 
-  /** After an issue was made or marked. */
   reloadIssues(): void {
     this.issuesRead.reload();
   }

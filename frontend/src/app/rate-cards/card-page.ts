@@ -61,6 +61,9 @@ export class CardPage {
   );
   protected readonly isOnChanges = computed(() => this.url().split(/[?#]/)[0].endsWith('/changes'));
   protected readonly isOwner = computed(() => this.session.may('owner'));
+  /** The card the workshop was founded with, which nobody has gone through. */
+  protected readonly isFounding = computed(() => this.store.summary()?.basedOnId === null);
+  protected readonly currency = this.formats.currency;
   protected readonly isRenaming = signal(false);
   protected readonly isFilling = signal(false);
   protected readonly about = computed(() => {

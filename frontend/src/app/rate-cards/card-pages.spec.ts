@@ -166,6 +166,7 @@ describe('The pages of rate cards', () => {
 
   it('leave a card in force as it is, for owners too', async () => {
     await open(`/rates/${inForceId}/money`);
+    expect(text()).toContain('Figures to begin with, in EUR: nobody at this workshop has judged them yet.');
     expect(text()).toContain('A margin of 18% on the price is a mark-up of 21.95% on the cost.');
     expect(element().querySelectorAll('input, select')).toHaveLength(0);
     expect(button('Change the rates')).toBeDefined();

@@ -219,6 +219,16 @@ describe('The pages of issues', () => {
       expect(spoken(element().querySelector('app-issue-box'))).toContain('Nothing stops it');
     });
 
+    it.each([
+      [ids.leg, false],
+      [null, true],
+    ])('tells of rates nobody has gone through: worked on a card copied from %s, %s', async (basedOnId, isTold) => {
+      server.basedOnId = basedOnId;
+      await open(IssuePage);
+      const box = spoken(element().querySelector('app-issue-box'));
+      expect(box.includes('those every workshop is founded with')).toBe(isTold);
+    });
+
     it('is issued by one button; where it did not arrive it says so and may be pressed again', async () => {
       await open(IssuePage);
       const go = jest.spyOn(TestBed.inject(Router), 'navigateByUrl').mockResolvedValue(true);
