@@ -3,14 +3,17 @@ import { buildUpsUsed } from '#shared/estimates/buildups-used';
 import { clientCautions } from '#shared/documents/client-cautions';
 import type { Figures } from '#shared/estimates/figures';
 import { isEmptyAlternative } from '#shared/estimates/is-empty-alternative';
+import { pricedScope, scopeTexts } from '#shared/estimates/scope-texts';
 import type { Snapshot } from '#shared/estimates/snapshot';
+import { paperWords } from '../documents';
 import { presentBuildUp, presentClientAlternative } from './client-alternatives-presenter';
 import { presentClientPieces } from './client-pieces-presenter';
 import { presentClientPrice } from './client-price-presenter';
 
-/** What is written on the issue, as it is. */
+/** What is written on the issue; what is not included is said where nobody wrote it, beside the lines that say what is. */
 function textsOf(snapshot: Snapshot) {
-  const { introduction, included, excluded, terms, presentation } = snapshot.draft.settings;
+  const { introduction, included, terms, presentation } = snapshot.draft.settings;
+  const { excluded } = scopeTexts(pricedScope(snapshot), paperWords(snapshot.workshop).say);
   const { note, issuedBy, client } = snapshot;
   return { introduction, included, excluded, terms, presentation, note, issuedBy, addressee: { ...client } };
 }

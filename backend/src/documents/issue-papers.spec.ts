@@ -169,7 +169,7 @@ describe('the estimate as a paper', () => {
     it('is said from the lines of the price where nobody wrote it', async () => {
       const text = await said(sampleSnapshot(smallDraft({ included: '', excluded: ' ' })));
       expect(text).toMatch(/Included .*Carving.*Gilding.*: what the lines above name, and no more\./);
-      expect(text).toContain('Not included Whatever this paper does not name.');
+      expect(text).toContain('Not included Whatever is not named here.');
       expect(text).not.toContain('Measured only');
     });
 

@@ -83,7 +83,7 @@ export const documents = {
   'paper-excluded': 'Not included',
   'paper-included-kinds': '{kinds}: what the lines above name, and no more.',
   'paper-measured-only': 'Measured only, with no work on it in this price: {names}.',
-  'paper-excluded-rest': 'Whatever this paper does not name.',
+  'paper-excluded-rest': 'Whatever is not named here.',
 
   'paper-drawings': 'Drawings',
   'paper-drawings-note':

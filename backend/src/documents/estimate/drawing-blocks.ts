@@ -1,4 +1,5 @@
 import { buildUpsUsed, type UsedBuildUp } from '#shared/estimates/buildups-used';
+import { pricedScope, unworkedOfChoice } from '#shared/estimates/scope-texts';
 import { drawnMembers } from '../drawn-members';
 import { drawnStrip } from '../drawn-strips';
 import { figureRows, figureWidth } from '../paper/figure-rows';
@@ -7,7 +8,7 @@ import type { Pdf } from '../paper/open-paper';
 import { textStyles } from '../paper/paper-colours';
 import { sectionBlocks } from '../paper/section-blocks';
 import { textBlock } from '../paper/text-block';
-import { type IssueContent, unworkedOf } from './issue-content';
+import type { IssueContent } from './issue-content';
 
 /** A note that stays with the row beneath it. */
 function noted(pdf: Pdf, note: string, rows: readonly Block[]): Block[] {
@@ -18,9 +19,9 @@ function noted(pdf: Pdf, note: string, rows: readonly Block[]): Block[] {
 
 /** The members that are worked, drawn to scale, three abreast. */
 export function memberDrawingBlocks(pdf: Pdf, content: IssueContent): Block[] {
-  const { draft, words } = content;
-  const unworked = unworkedOf(content);
-  const members = draft.members.filter((member) => !unworked.includes(member));
+  const { draft, words, snapshot } = content;
+  const unworked = unworkedOfChoice(pricedScope(snapshot)).map(({ id }) => id);
+  const members = draft.members.filter(({ id }) => !unworked.includes(id));
   const box = { width_pt: figureWidth(pdf, 3), height_pt: 150 };
   const figures = drawnMembers(pdf, members, { box, words, isForTheBench: false });
   const rows = figureRows(pdf, figures, 3);

@@ -2,7 +2,6 @@ import { chosenDraft } from '#shared/estimates/chosen-draft';
 import type { Draft } from '#shared/estimates/draft';
 import type { Member } from '#shared/estimates/member';
 import type { Snapshot } from '#shared/estimates/snapshot';
-import { unworkedMembers } from '#shared/estimates/unworked-members';
 import { paperWords, type PaperWords } from '../paper-words';
 
 /** An issue ready to be written: its words, and the draft as the choice of alternatives makes it. */
@@ -25,9 +24,3 @@ export const issueContent = (snapshot: Snapshot): IssueContent => ({
 /** A member by its id, of the base or of any alternative. */
 export const memberOf = ({ snapshot }: IssueContent, id: string | null): Member | undefined =>
   snapshot.draft.members.find((member) => member.id === id);
-
-/** Members that were measured and no more; one that an alternative works is not among them. */
-export function unworkedOf({ snapshot, draft }: IssueContent): Member[] {
-  const unworked = unworkedMembers(snapshot.draft, snapshot.figures.price.lines).map(({ id }) => id);
-  return draft.members.filter(({ id }) => unworked.includes(id));
-}

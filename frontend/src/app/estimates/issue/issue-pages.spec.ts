@@ -199,6 +199,20 @@ describe('The pages of issues', () => {
       ]);
     });
 
+    it('previews the sums and the scope as the paper will have them', async () => {
+      await open(IssuePage);
+      const preview = () => spoken(element().querySelector('app-paper-preview'));
+      expect(preview()).toMatch(/Net.+Standard rate, 20%.+Total/);
+      expect(preview()).toContain('Measured only, with no work on it in this price: Leg.');
+    });
+
+    it('previews one sum where all lies outside the scope of tax', async () => {
+      server.settings = { ...server.settings, taxCategoryId: 'outside-scope' };
+      await open(IssuePage);
+      const sums = [...element().querySelectorAll('app-paper-preview app-price-sums dt')].map(spoken);
+      expect(sums).toEqual(['Total']);
+    });
+
     it('hears at once of a card that has just come into force, before it says that nothing stops it', async () => {
       let answer: (present: PresenceAnswer) => void = () => undefined;
       const asked = () => new Promise<PresenceAnswer>((resolve) => (answer = resolve));

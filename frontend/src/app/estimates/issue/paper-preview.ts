@@ -1,8 +1,11 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { scopeTexts } from '#shared/estimates/scope-texts';
 import { Formats } from '../../core/formats/formats';
+import { Words } from '../../core/formats/words';
 import { EstimateStore } from '../estimate-store';
 import { AlternativeTotals } from '../price/alternative-totals';
 import { PriceLines } from '../price/price-lines';
+import { PriceNames } from '../price/price-names';
 import { IssueParts } from './issue-parts';
 import { Letterhead } from './letterhead';
 import { Validity } from './validity';
@@ -19,6 +22,8 @@ export class PaperPreview {
   private readonly formats = inject(Formats);
   private readonly totals = inject(AlternativeTotals);
   private readonly validity = inject(Validity);
+  private readonly names = inject(PriceNames);
+  private readonly words = inject(Words);
   protected readonly store = inject(EstimateStore);
   protected readonly parts = inject(IssueParts);
   protected readonly letterhead = inject(Letterhead);
@@ -46,8 +51,15 @@ export class PaperPreview {
         difference: this.difference(this.totals.totals().get(id)?.difference_minor),
       })),
   );
+  protected readonly taxName = computed(() => this.names.taxOf(this.store.card()?.money.taxCategories));
+  private readonly scope = computed(() => {
+    const [draft, choice, lines] = [this.store.draft(), this.store.choice(), this.store.priced()?.price.lines];
+    if (!draft || !lines) return { included: '', excluded: '' };
+    return scopeTexts({ draft, choice, lines }, (code, values) => this.words.say(code, values));
+  });
   protected readonly texts = computed(() => {
-    const { included = '', excluded = '', terms = '' } = this.store.settings() ?? {};
+    const { terms = '' } = this.store.settings() ?? {};
+    const { included, excluded } = this.scope();
     const all = [
       { heading: $localize`Included`, text: included },
       { heading: $localize`Not included`, text: excluded },

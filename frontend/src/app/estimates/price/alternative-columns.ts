@@ -49,7 +49,7 @@ export class AlternativeColumns {
 
   private price(): Column {
     const sign = this.formats.currencySign();
-    return this.column('gross_minor', $localize`Gross, ${sign}:sign:`, (amount) => this.formats.amount(amount));
+    return this.column('gross_minor', $localize`Total, ${sign}:sign:`, (amount) => this.formats.amount(amount));
   }
 
   private column(which: RowFigure, heading: string, write: Written): Column {

@@ -15,6 +15,12 @@ export class PriceNames {
     return this.words.say(`cost-head-${head}`);
   }
 
+  /** Names of tax categories by id, as far as the reader knows the card; empty for the others. */
+  taxOf(categories: readonly { readonly id: string; readonly name: string }[] = []): (id: string) => string {
+    const names = new Map(categories.map(({ id, name }) => [id, name]));
+    return (id) => names.get(id) ?? '';
+  }
+
   /** Names of members by id; what belongs to none is the job as a whole. */
   memberOf(names: ReadonlyMap<string, string>): (memberId: string | null) => string {
     return (memberId) =>

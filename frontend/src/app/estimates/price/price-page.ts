@@ -14,6 +14,7 @@ import { ExtrasPart } from './extras-part';
 import { MoneyBar } from './money-bar';
 import { PresentationChoice } from './presentation-choice';
 import { PriceLines } from './price-lines';
+import { PriceNames } from './price-names';
 import { pricePartKeys, PriceParts, type PricePartKey } from './price-parts';
 import { profitExplained } from './profit-explained';
 import { ProfitForm } from './profit-form';
@@ -43,6 +44,7 @@ import { StagesPart } from './stages-part';
 })
 export class PricePage {
   private readonly formats = inject(Formats);
+  private readonly names = inject(PriceNames);
   protected readonly store = inject(EstimateStore);
   protected readonly parts = inject(PriceParts);
 
@@ -66,10 +68,7 @@ export class PricePage {
     const alternatives = this.store.settings()?.alternatives ?? [];
     return alternatives.filter(({ id }) => chosen.includes(id)).map(({ name }) => name);
   });
-  protected readonly taxName = computed(() => {
-    const names = new Map((this.store.card()?.money.taxCategories ?? []).map(({ id, name }) => [id, name]));
-    return (taxCategoryId: string) => names.get(taxCategoryId) ?? '';
-  });
+  protected readonly taxName = computed(() => this.names.taxOf(this.store.card()?.money.taxCategories));
   /** What the place is about: what is left of the price, or for the office how it adds up. */
   private readonly about = computed<Explained | undefined>(() => {
     const [priced, cost] = [this.store.priced(), this.cost()];

@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import type { PriceLines } from '#shared/estimates/price/price';
+import { isOutsideTax } from '#shared/money/is-outside-tax';
 import { Formats } from '../../core/formats/formats';
 import type { Explained } from '../../ui/figure/explained';
 import { Figure } from '../../ui/figure/figure';
@@ -12,7 +13,7 @@ interface Sum {
   readonly explained?: Explained;
 }
 
-/** What lines come to: subtotal and discount where there is one, net, tax by category, gross. */
+/** What lines come to: subtotal and discount where there is one, net and tax by category where there may be tax, and the total. */
 @Component({
   selector: 'app-price-sums',
   imports: [Figure],
@@ -67,21 +68,22 @@ export class PriceSums {
   readonly taxName = input<(taxCategoryId: string) => string>(() => '');
 
   protected readonly sums = computed<readonly Sum[]>(() => {
-    const { subtotal_minor, discount_minor, net_minor, gross_minor } = this.price();
+    const { subtotal_minor, discount_minor, gross_minor } = this.price();
     const discounted = [
       this.sum('subtotal', $localize`Subtotal`, subtotal_minor),
       this.sum('discount', $localize`Discount`, -discount_minor),
     ];
     return [
       ...(discount_minor === 0 ? [] : discounted),
-      this.worked('net', $localize`Net`, net_minor),
       ...this.taxes(),
-      this.worked('gross', $localize`Gross`, gross_minor),
+      this.worked('gross', $localize`Total`, gross_minor),
     ];
   });
 
   private taxes(): Sum[] {
-    return this.price().taxes.map(({ taxCategoryId, tax, tax_minor }) => {
+    const { net_minor, taxes } = this.price();
+    if (isOutsideTax(taxes.map(({ tax }) => tax))) return [];
+    const each = taxes.map(({ taxCategoryId, tax, tax_minor }) => {
       const percent = this.formats.figure('percent', Number(tax.percent));
       const name = this.taxName()(taxCategoryId);
       return this.sum(
@@ -90,6 +92,7 @@ export class PriceSums {
         tax_minor,
       );
     });
+    return [this.worked('net', $localize`Net`, net_minor), ...each];
   }
 
   private sum(key: string, name: string, amount_minor: number): Sum {

@@ -68,7 +68,7 @@ export class StagesPart {
   protected readonly totals = computed(() => {
     const gross_minor = this.store.priced()?.price.gross_minor;
     const paid_minor = gross_minor === undefined ? '' : this.formats.amount(gross_minor);
-    return { name: $localize`Gross price`, paid_minor };
+    return { name: $localize`Total`, paid_minor };
   });
   protected readonly chosenStage = computed(() => this.entries().find(({ id }) => id === this.chosen()));
   protected readonly rowId = ({ id }: StageRow): string => id;
