@@ -7,6 +7,7 @@ export const accounts = {
   'password-about-you': 'A password must not hold the name of the workshop, the product, or your own name or address.',
   'last-owner': 'A workshop needs an owner. Make somebody else an owner first.',
   'already-member': 'This person already belongs to the workshop.',
+  'roles-none': 'Choose at least one role.',
   'picture-not-readable': 'Only pictures in PNG, JPEG or WebP can be used here.',
   'picture-too-many-pixels': 'This picture is larger than {megapixels} megapixels. Please scale it down first.',
   'file-name-not-fitting': 'The ending of the file’s name does not fit what is in it.',

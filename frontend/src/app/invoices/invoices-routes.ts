@@ -70,4 +70,6 @@ export const invoicesRoutes: Routes = [
       },
     ],
   },
+  // Whoever sees an invoice or a statement and keeps no books has no list of them.
+  { path: '', pathMatch: 'full', redirectTo: '/' },
 ];
