@@ -17,7 +17,7 @@ const testSupport = '^(test|frontend/src/test)/';
 const schemaOrEndpoints = '^(shared/(endpoints|.+(-schema|-endpoints|/endpoint))|frontend/src/app/.+-schema)\\.ts$';
 const calculator = '^shared/(?!endpoints\\.ts|.+(-schema|-endpoints|/endpoint)\\.ts).+\\.ts$';
 const worker = '-worker\\.ts$';
-const paperWorker = '^backend/src/(documents|invoices)/(invoice-)?paper-worker\\.ts$';
+const fileWorker = '^backend/src/(documents|invoices|rate-cards)/.*(paper|workbook)-worker\\.ts$';
 const serverEntry = '^backend/src/[^/]+\\.ts$';
 const pageEntry = '^frontend/src/(app/)?[^/]+\\.ts$';
 
@@ -194,16 +194,17 @@ const calculators = [
     to: { pathNot: ['^shared/', installed(['convert-units', 'decimal\\.js'])] },
   }),
   never('A worker imports calculators only', {
-    comment: 'It carries no schema, no page and no database into its thread; the maker of papers brings its papers.',
-    from: { path: worker, pathNot: paperWorker },
+    comment:
+      'It carries no schema, no page and no database into its thread; what makes papers or reads workbooks brings its own feature.',
+    from: { path: worker, pathNot: fileWorker },
     to: { pathNot: [calculator, '^(node:)?worker_threads$'] },
   }),
 ];
 
-const paperThread = [
-  never('The thread of papers sees its own feature only', {
+const fileThread = [
+  never('A thread of papers or workbooks sees its own feature only', {
     comment: 'It is given everything a paper says, and asks nobody.',
-    from: { path: paperWorker },
+    from: { path: fileWorker },
     to: { pathNot: ['^backend/src/$1/', '^(node:)?worker_threads$'] },
   }),
 ];
@@ -232,7 +233,7 @@ const everywhere = [
 ];
 
 module.exports = {
-  forbidden: [...order, ...sides, ...doors, ...techniques, ...calculators, ...paperThread, ...everywhere],
+  forbidden: [...order, ...sides, ...doors, ...techniques, ...calculators, ...fileThread, ...everywhere],
   options: {
     doNotFollow: { path: 'node_modules' },
     tsPreCompilationDeps: true,

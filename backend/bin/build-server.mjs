@@ -9,6 +9,7 @@ export const threads = {
   'risk-worker': 'backend/src/estimates/risk-worker.ts',
   'paper-worker': 'backend/src/documents/paper-worker.ts',
   'invoice-paper-worker': 'backend/src/invoices/invoice-paper-worker.ts',
+  'card-workbook-worker': 'backend/src/rate-cards/card-workbook-worker.ts',
   'programme-worker': 'backend/src/programme/programme-worker.ts',
 };
 

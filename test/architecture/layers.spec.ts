@@ -209,11 +209,15 @@ const breaches: readonly Breach[] = [
   breach('A worker imports calculators only', 'frontend/src/app/estimates/tally-worker.ts', '#shared/jobs/job-schema'),
   breach('A worker imports calculators only', 'backend/src/estimates/tally-worker.ts', 'sequelize'),
   {
-    rule: 'The thread of papers sees its own feature only',
+    rule: 'A thread of papers or workbooks sees its own feature only',
     at: 'backend/src/documents/paper-worker.ts',
     text: imports('sequelize'),
   },
-  breach('The thread of papers sees its own feature only', 'backend/src/invoices/invoice-paper-worker.ts', '../jobs'),
+  breach(
+    'A thread of papers or workbooks sees its own feature only',
+    'backend/src/invoices/invoice-paper-worker.ts',
+    '../jobs',
+  ),
   breach('No import runs in a circle', 'shared/jobs/planted-circle.ts', './planted-half'),
   breach('Every import leads somewhere', 'shared/jobs/planted-astray.ts', '#shared/measure/nowhere'),
   breach('Every package is named in package.json', 'backend/src/jobs/stray-service.ts', 'stray'),

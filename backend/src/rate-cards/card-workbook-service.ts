@@ -4,10 +4,10 @@ import type { WorkshopService } from '../accounts';
 import type { Seen } from '../platform/database/keeping';
 import { FileAnswer } from '../platform/http/answer';
 import type { Upload } from '../platform/http/call';
+import { CardReading } from './card-reading';
 import type { DraftCardService } from './draft-card-service';
 import type { RateCardHead } from './rate-card-model';
 import type { RateCardRepository } from './rate-card-repository';
-import { readCardWorkbook } from './workbook/read-card-workbook';
 import { writeCardWorkbook } from './workbook/write-card-workbook';
 
 interface Parts {
@@ -20,6 +20,8 @@ const media = 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet
 
 /** Rate cards as workbooks: sent out whole, and taken in whole or not at all. */
 export class CardWorkbookService {
+  private readonly reading = new CardReading();
+
   constructor(private readonly parts: Parts) {}
 
   async export(workshopId: string, id: string): Promise<FileAnswer> {
@@ -34,6 +36,6 @@ export class CardWorkbookService {
     if (!upload || !/\.xlsx$/i.test(upload.name)) throw new Rejection('unsupported', 'workbook-not-xlsx');
     await this.parts.drafts.standing(actor, seen);
     const { currency } = await this.parts.workshops.get(actor.workshopId);
-    return this.parts.drafts.fill(actor, seen, await readCardWorkbook(upload.bytes, currency));
+    return this.parts.drafts.fill(actor, seen, await this.reading.card(upload.bytes, currency));
   }
 }

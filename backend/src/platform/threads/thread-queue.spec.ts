@@ -11,6 +11,7 @@ parentPort.on('message', (question) => {
   asked += 1;
   if (question === 'end') process.exit(0);
   if (question === 'throw') throw new Error('thrown inside');
+  if (question === 'hang') for (;;);
   if (question === 'fail') return parentPort.postMessage({ error: 'cannot be worked' });
   setTimeout(() => parentPort.postMessage({ answer: { question, asked } }), 20);
 });
@@ -30,7 +31,7 @@ beforeEach(() => {
     begun += 1;
     return { file: join(folder, 'thread.js'), options: {} };
   };
-  queue = new ThreadQueue(start, 10);
+  queue = new ThreadQueue(start, { waiting: 10, time: { milliseconds: 1_000, failure: () => new Error('too long') } });
 });
 afterAll(() => rmSync(folder, { recursive: true }));
 
@@ -63,6 +64,13 @@ test.each(['end', 'throw'])(
     expect(begun).toBe(2);
   },
 );
+
+test('one that takes longer than it may is ended, and another thread answers the rest', async () => {
+  const [late, after] = await Promise.allSettled([queue.ask('hang'), queue.ask('b')]);
+  expect(late).toMatchObject({ status: 'rejected', reason: { message: 'too long' } });
+  expect(after).toEqual({ status: 'fulfilled', value: { question: 'b', asked: 1 } });
+  expect(begun).toBe(2);
+});
 
 test('more than may wait are refused at once, with a time to come again', async () => {
   const asked = Array.from({ length: 13 }, (_, at) => queue.ask(`${at}`));

@@ -1,5 +1,6 @@
 import { crc32, deflateRawSync } from 'node:zlib';
 import { Rejection } from '#shared/problems/rejection';
+import { CardReading } from '../card-reading';
 import { readSheets } from './read-sheets';
 
 interface Part {
@@ -175,4 +176,22 @@ describe('A workbook that is read', () => {
     };
     expect(await refusal(archive([types, rels, book, links, sheet]))).toBe('workbook-not-xlsx');
   });
+});
+
+test('a small workbook whose XML takes many seconds is refused in time, while everything else goes on', async () => {
+  const hostile = archive(workbook({ book: '<a>'.repeat(4_000_000) }));
+  expect(hostile.length).toBeLessThan(100_000);
+  const reading = new CardReading(3_000);
+  let [last, longestGap] = [performance.now(), 0];
+  const ticking = setInterval(() => {
+    longestGap = Math.max(longestGap, performance.now() - last);
+    last = performance.now();
+  }, 10);
+  const [refused, next] = await Promise.allSettled(
+    [hostile, archive(workbook())].map((bytes) => reading.card(bytes, 'EUR')),
+  );
+  clearInterval(ticking);
+  expect(refused).toMatchObject({ reason: { kind: 'too-large', code: 'workbook-too-large' } });
+  expect(next).toMatchObject({ reason: { kind: 'invalid', code: 'workbook-faulty' } });
+  expect(longestGap).toBeLessThan(1_000);
 });
