@@ -184,6 +184,23 @@ describe('its end', () => {
     expect((await visitor.call(listPeople)).status).toBe(401);
   });
 
+  test('comes with signing out though a workshop is entered at the same time', async () => {
+    const { email, actor } = await api.newcomer(api.ours, 'bench');
+    const body = { membershipId: actor.membershipId };
+    const left = 'SELECT COUNT(*) AS count FROM sessions WHERE account_id = :accountId';
+    const found: { out: number; left: number }[] = [];
+    for (let round = 0; round < 20; round++) {
+      const visitor = await newSession(email);
+      if (round === 0) await visitor.call(endOtherSessions);
+      const calls = [() => visitor.call(enterWorkshop, { body }), () => visitor.call(signOut)];
+      const together = (round % 2 ? calls : calls.toReversed()).map((call) => call().then(({ status }) => status));
+      const out = (await Promise.all(together))[round % 2] ?? 0;
+      const [row] = await api.platform.database.select<{ count: number }>(left, { accountId: actor.accountId });
+      found.push({ out, left: Number(row?.count) });
+    }
+    expect(found).toEqual(found.map(() => ({ out: 204, left: 0 })));
+  });
+
   test('comes with the end of access, which does not touch other workshops', async () => {
     const { visitor, actor } = await api.newcomer(api.ours, 'bench');
     const end = { params: { id: actor.membershipId }, version: 1, body: { isDisabled: true } };

@@ -8,8 +8,8 @@ declare module 'express-serve-static-core' {
     accountId?: string;
     /** The client on a visit, if the session has one that still holds. (`client` is Node's own word for the socket.) */
     visitingClient?: ClientActor | undefined;
-    /** The forgery token that the next session of the same person goes on with. */
-    tokenToKeep?: string;
+    /** The session whose place another takes: the same person goes on with its token and its handle. */
+    replaced?: { readonly id: string; readonly forgeryToken: string | undefined; readonly handle: string | undefined };
     /** When somebody signed in, which the next session of theirs goes on with. */
     begunAtToKeep?: number;
   }

@@ -3,6 +3,7 @@ import type { Request, RequestHandler } from 'express';
 import session from 'express-session';
 import { Passport } from 'passport';
 import { Strategy as LocalStrategy } from 'passport-local';
+import { Rejection } from '#shared/problems/rejection';
 import type { Config } from '../config/config';
 import { newSessionId } from '../session/new-session-id';
 import { markUnattended, type SessionStore } from '../session/session-store';
@@ -25,10 +26,18 @@ export function nameCaller(request: Request, signedIn: SignedIn | undefined): vo
 
 const beginSession = (request: Request): void => {
   if (request.begunAtToKeep !== undefined) request.session.begunAt = request.begunAtToKeep;
-  request.session.forgeryToken ??= request.tokenToKeep ?? randomBytes(32).toString('base64url');
-  request.session.handle ??= randomUUID();
+  request.session.forgeryToken ??= request.replaced?.forgeryToken ?? randomBytes(32).toString('base64url');
+  request.session.handle ??= request.replaced?.handle ?? randomUUID();
   request.session.agent ??= (request.get('user-agent') ?? '').slice(0, 200);
 };
+
+/** Notes the session that another takes the place of, once: a transaction that is repeated finds the other one in its request. */
+const goOnFrom = (request: Request): { readonly id: string } =>
+  (request.replaced ??= {
+    id: request.sessionID,
+    forgeryToken: request.session.forgeryToken,
+    handle: request.session.handle,
+  });
 
 /** Reads the session of a request and who it speaks for. */
 export class Sessions {
@@ -100,8 +109,7 @@ export class Sessions {
 
   /** Under a new id; the token stays for the same person, whose page still holds it. */
   private async signIn(request: Request, identity: Identity): Promise<void> {
-    const { passport, forgeryToken } = request.session;
-    if (passport?.user?.accountId === identity.accountId && forgeryToken) request.tokenToKeep = forgeryToken;
+    if (request.session.passport?.user?.accountId === identity.accountId) goOnFrom(request);
     await new Promise<void>((resolve, reject) => {
       request.logIn(identity, (error) => (error ? reject(error as Error) : resolve()));
     });
@@ -112,7 +120,14 @@ export class Sessions {
   private async enter(request: Request, identity: Identity): Promise<void> {
     const { begunAt } = request.session;
     if (begunAt !== undefined) request.begunAtToKeep = begunAt;
+    await this.endReplaced(request);
     await this.signIn(request, identity);
+  }
+
+  /** Refused where the session has ended meanwhile: who signed out stays signed out. */
+  private async endReplaced(request: Request): Promise<void> {
+    const { id } = goOnFrom(request);
+    if (!(await this.store.end(id))) throw new Rejection('signed-out', 'problem-signed-out');
   }
 
   private visitRead(): RequestHandler {
@@ -126,6 +141,7 @@ export class Sessions {
   /** Under a new id, so that nobody else knows the session a client reads in. */
   private async beginVisit(request: Request, visit: Visit): Promise<void> {
     const { passport, forgeryToken, handle, begunAt } = request.session;
+    if (passport?.user) await this.endReplaced(request);
     await new Promise<void>((resolve, reject) => {
       request.session.regenerate((error) => (error ? reject(error as Error) : resolve()));
     });
@@ -136,16 +152,19 @@ export class Sessions {
     });
   }
 
-  private signOut(request: Request): Promise<void> {
+  /** What took the session's place meanwhile bears the same handle, and is looked for only when the session's own row is free. */
+  private async signOut(request: Request): Promise<void> {
+    const { handle = '' } = request.session;
     request.res?.clearCookie(cookieName(this.config), {
       path: '/',
       httpOnly: true,
       sameSite: 'lax',
       secure: isPublic(this.config),
     });
-    return new Promise((resolve, reject) => {
+    await new Promise<void>((resolve, reject) => {
       request.session.destroy((error) => (error ? reject(error as Error) : resolve()));
     });
+    await this.store.endOfHandle(handle);
   }
 
   private byPassword(request: Request, signIn: (identity: Identity) => Promise<void>): Promise<Identity | undefined> {

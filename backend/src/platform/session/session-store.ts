@@ -50,7 +50,16 @@ export class SessionStore extends Store {
   }
 
   override destroy(id: string, done?: Done): void {
-    settle(this.database.execute('DELETE FROM sessions WHERE id_hash = :hash', { hash: hashOf(id) }), done);
+    settle(this.end(id), done);
+  }
+
+  /** Whether there was such a session to end. */
+  async end(id: string): Promise<boolean> {
+    return (await this.database.execute('DELETE FROM sessions WHERE id_hash = :hash', { hash: hashOf(id) })) > 0;
+  }
+
+  endOfHandle(handle: string): Promise<number> {
+    return this.database.execute('DELETE FROM sessions WHERE id = :handle', { handle });
   }
 
   /** Deletes the sessions that have ended; answers how many. */
