@@ -95,8 +95,13 @@ export class ContractService {
     const currency = accepted[0]?.estimate.currency;
     if (currency === undefined) return undefined;
     const decisions = await this.parts.decisions.ofJob(workshopId, jobId);
-    const issues = await Promise.all(accepted.map(({ row }) => this.parts.frozen.read(workshopId, row.id)));
-    return contractOf({ jobId, clientId, currency }, issues, decisions);
+    const ids = accepted.map(({ row }) => row.id);
+    const found = new Map((await this.parts.frozen.several(workshopId, ids)).map((issue) => [issue.row.id, issue]));
+    return contractOf(
+      { jobId, clientId, currency },
+      ids.flatMap((id) => found.get(id) ?? []),
+      decisions,
+    );
   }
 
   /** Contracts of all jobs, of each those parts of which something may be left: in the same few queries however many there are. */

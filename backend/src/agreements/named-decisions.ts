@@ -1,4 +1,5 @@
 import { chosenNames } from '#shared/estimates/chosen-names';
+import type { Snapshot } from '#shared/estimates/snapshot';
 import type { FrozenIssueService } from '../estimates';
 import { words } from '../platform/http/words';
 import type { DecisionRow } from './decision-model';
@@ -10,18 +11,26 @@ export interface NamedDecision {
   readonly names: readonly string[];
 }
 
+function named(row: DecisionRow, { estimate, draft }: Snapshot): NamedDecision {
+  const { number, letter } = estimate;
+  const names = chosenNames(draft.settings.alternatives, row.choice);
+  return { row, number: words('paper-number-letter', { number, letter }), names };
+}
+
 /** Decisions with the names of what was decided on and what was chosen, as the issues have them. */
 export class NamedDecisions {
-  constructor(private readonly frozen: Pick<FrozenIssueService, 'read'>) {}
+  constructor(private readonly frozen: Pick<FrozenIssueService, 'several'>) {}
 
-  of(rows: readonly DecisionRow[]): Promise<NamedDecision[]> {
-    return Promise.all(rows.map((row) => this.named(row)));
-  }
-
-  private async named(row: DecisionRow): Promise<NamedDecision> {
-    const { snapshot } = await this.frozen.read(row.workshopId, row.issueId);
-    const { number, letter } = snapshot.estimate;
-    const names = chosenNames(snapshot.draft.settings.alternatives, row.choice);
-    return { row, number: words('paper-number-letter', { number, letter }), names };
+  /** Of decisions of one workshop. */
+  async of(rows: readonly DecisionRow[]): Promise<NamedDecision[]> {
+    const [first] = rows;
+    if (!first) return [];
+    const issueIds = rows.map(({ issueId }) => issueId);
+    const issues = await this.frozen.several(first.workshopId, issueIds);
+    const snapshots = new Map(issues.map(({ row, snapshot }) => [row.id, snapshot]));
+    return rows.flatMap((row) => {
+      const snapshot = snapshots.get(row.issueId);
+      return snapshot ? [named(row, snapshot)] : [];
+    });
   }
 }

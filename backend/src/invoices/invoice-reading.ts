@@ -25,7 +25,7 @@ export class InvoiceReading {
 
   async page(workshopId: string, asked: InvoicesAsked): Promise<Page<InvoiceSummary>> {
     const page = await this.parts.invoices.pageOf(workshopId, asked);
-    const names = await this.parts.ledger.names(
+    const names = await this.parts.jobs.clientNames(
       workshopId,
       page.items.map(({ clientId }) => clientId),
     );
@@ -111,7 +111,7 @@ export class InvoiceReading {
       shares.map(({ invoiceId }) => invoiceId),
     );
     const numbers = new Map(named.map(({ id, number }) => [id, number ?? '']));
-    const names = await this.parts.ledger.names(
+    const names = await this.parts.jobs.clientNames(
       workshopId,
       rows.map(({ clientId }) => clientId),
     );

@@ -86,7 +86,7 @@ export class LedgerService {
     }));
     const rows = [...open, ...credit];
     if (rows.length === 0) return { day, currencies: [] };
-    const names = await this.names(
+    const names = await this.parts.jobs.clientNames(
       workshopId,
       rows.map(({ clientId }) => clientId),
     );
@@ -125,13 +125,6 @@ export class LedgerService {
     return { ...days, currencies };
   }
 
-  /** What clients are called, each asked for once. */
-  async names(workshopId: string, clientIds: readonly string[]): Promise<Named> {
-    const names = new Map<string, string>();
-    for (const id of new Set(clientIds)) names.set(id, (await this.parts.jobs.client(workshopId, id)).name);
-    return names;
-  }
-
   /** The entries of money with the way it came and the invoices it is for, what was taken back already counted. */
   private async paid(workshopId: string, entries: readonly LedgerEntry[], days: Days): Promise<LedgerEntry[]> {
     const payments = await this.parts.payments.receivedBetween(workshopId, days);
@@ -163,7 +156,7 @@ export class LedgerService {
       workshopId,
       writeOffs.map(({ invoiceId }) => invoiceId),
     );
-    const names = await this.names(
+    const names = await this.parts.jobs.clientNames(
       workshopId,
       [...invoices, ...payments, ...given].map(({ clientId }) => clientId),
     );

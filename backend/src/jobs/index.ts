@@ -31,6 +31,8 @@ export interface Jobs {
   /** Those of these jobs that are the workshop's, asked for all at once. */
   readonly several: (workshopId: string, jobIds: readonly string[]) => Promise<NamedJobRow[]>;
   readonly client: (workshopId: string, clientId: string) => Promise<ClientRow>;
+  /** What clients are called, by their ids, asked for all at once. */
+  readonly clientNames: (workshopId: string, clientIds: readonly string[]) => Promise<ReadonlyMap<string, string>>;
   /** Says where issues have brought a job; called in the transaction that brings it there. */
   readonly markState: (by: Doer, jobId: string, reached: ReachedState) => Promise<void>;
   /** Says that somebody worked on a job. */
@@ -60,6 +62,7 @@ export function openJobs({ database, clock }: Platform, { audit, accounts, estim
     job: (workshopId, jobId) => service.get(workshopId, jobId),
     several: (workshopId, jobIds) => base.named.several(workshopId, jobIds),
     client: (workshopId, clientId) => clientService.get(workshopId, clientId),
+    clientNames: (workshopId, clientIds) => clients.names(workshopId, clientIds),
     markState: (by, jobId, reached) => states.mark(by, jobId, reached),
     touch: (workshopId, jobId) => states.touch(workshopId, jobId),
     routes: [...clientsRoutes(clientService), ...jobsRoutes({ jobs: service, states })],

@@ -30,7 +30,7 @@ export interface BoardParts {
   readonly contexts: ProgrammeContexts;
   readonly cards: RateCards['service'];
   readonly workshops: Accounts['workshops'];
-  readonly jobs: Pick<Jobs, 'job'>;
+  readonly jobs: Pick<Jobs, 'several'>;
 }
 
 /** The board as far as it is asked for. */

@@ -9,11 +9,11 @@ export interface JobName {
 
 /** The names of the jobs that are promised, by their id. */
 export async function jobNames(
-  jobs: Pick<Jobs, 'job'>,
+  jobs: Pick<Jobs, 'several'>,
   workshopId: string,
   promised: readonly { readonly jobId: string }[],
 ): Promise<ReadonlyMap<string, JobName>> {
   const ids = [...new Set(promised.map(({ jobId }) => jobId))];
-  const rows = await Promise.all(ids.map((id) => jobs.job(workshopId, id)));
+  const rows = await jobs.several(workshopId, ids);
   return new Map(rows.map((row) => [row.id, { number: jobNumber(row), title: row.title, clientName: row.clientName }]));
 }
