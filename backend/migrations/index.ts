@@ -21,7 +21,7 @@ import { reachedStages } from './0057-reached-stages';
 import { leftSince } from './0058-left-since';
 import { totalsInLetters } from './0059-totals-in-letters';
 
-/** Every step of the schema, in the order in which they are taken. A step that was released is never changed. */
+/** Every step of the schema, in the order in which they are taken. A step that was released is never changed (`test/repositories`). */
 export const migrations: readonly Migration[] = [
   platform,
   accounts,

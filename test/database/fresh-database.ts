@@ -10,13 +10,19 @@ const server = (): string => {
 
 let made = 0;
 
-/** An empty database of this Jest worker's own, brought up to date; answers its address. */
-export async function freshDatabase(): Promise<string> {
+/** An empty database of this Jest worker's own; answers its address. */
+export async function emptyDatabase(): Promise<string> {
   const name = `test_${process.env['JEST_WORKER_ID'] ?? '0'}_${++made}`;
   const root = new Database(`${server()}/mysql`, 1);
   await root.sequelize.getQueryInterface().dropDatabase(name);
   await root.sequelize.getQueryInterface().createDatabase(name);
   await root.close();
-  await migrate(`${server()}/${name}`, migrations);
   return `${server()}/${name}`;
+}
+
+/** The same, brought up to date. */
+export async function freshDatabase(): Promise<string> {
+  const url = await emptyDatabase();
+  await migrate(url, migrations);
+  return url;
 }
