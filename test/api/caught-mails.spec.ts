@@ -29,3 +29,19 @@ test('a caught mail shows its text, its HTML as it is written, and what came wit
   expect(page.text).toContain('<li>estimate &lt;A&gt;.pdf, application/pdf, 17 bytes</li>');
   expect(page.text).not.toMatch(/<script|<img/);
 });
+
+test.each([
+  ['127.0.0.1:3000', 200],
+  ['127.0.0.1', 200],
+  ['localhost:3000', 200],
+  ['LOCALHOST', 200],
+  ['[::1]:3000', 200],
+  ['rebound.example', 404],
+  ['rebound.example:3000', 404],
+  ['127.0.0.1.rebound.example:3000', 404],
+  ['localhost.rebound.example', 404],
+  ['192.168.1.20:3000', 404],
+])('asked for as %s it answers %i, for other names may lead here too', async (host, status) => {
+  const page = await request(api.app.web.express).get('/development/mail').set('host', host);
+  expect(page.status).toBe(status);
+});
