@@ -20,10 +20,13 @@ export async function listen(handler: RequestListener): Promise<Listening> {
   return { address: `http://127.0.0.1:${port}`, stop };
 }
 
-/** The whole application on a throw-away database, for as long as the work takes. */
-export async function withApi<T>(work: (api: Api) => Promise<T>): Promise<T> {
+/** The whole application on a throw-away database, for as long as the work takes; `environment` overrides settings. */
+export async function withApi<T>(
+  work: (api: Api) => Promise<T>,
+  environment: Readonly<Record<string, string>> = {},
+): Promise<T> {
   await jestSetUp();
-  const api = await startApi();
+  const api = await startApi(environment);
   try {
     return await work(api);
   } finally {
