@@ -10,7 +10,7 @@ test('every endpoint has its row, and no row is left over', () => {
   expect(Object.keys(clientRows).sort()).toEqual(forClients.map(({ name }) => name).sort());
 });
 
-test('every endpoint is served, under a name of its own', () => {
+test('every endpoint has a name, and a method and path, of its own', () => {
   expect(new Set(endpoints.map(({ name }) => name)).size).toBe(endpoints.length);
   expect(new Set(endpoints.map(({ method, path }) => `${method} ${path}`)).size).toBe(endpoints.length);
 });
