@@ -60,7 +60,7 @@ test('after a session has ended, a change is answered with a request to sign in,
   expect(response.status).toBe(401);
 });
 
-test('a token is of no use under another method override', async () => {
+test('a reading stays one, whatever method a header asks for instead', async () => {
   const response = await api.as('bench').request('get', endOtherSessions.path).set('x-http-method-override', 'DELETE');
   expect(response.status).toBe(200);
 });
