@@ -26,19 +26,13 @@ interface Priced {
   readonly digits: number;
 }
 
-// Zones burnished to different shares are laid again to different extents.
-const secondKey = ({ way, losses }: ZoneLeaf): string =>
-  [
-    'second',
-    ...losses.secondLayings.flatMap(({ finish, share }) => (share === 1 ? [finish] : [finish, share])),
-    way,
-  ].join('/');
+const lossKeys = ({ way }: ZoneLeaf) => ({ breakageKey: `breakage/${way}`, faultingKey: `faulting/${way}` });
 
-const lossKeys = (leaf: ZoneLeaf) => ({
-  breakageKey: `breakage/${leaf.way}`,
-  faultingKey: `faulting/${leaf.way}`,
-  secondLayingKey: secondKey(leaf),
-});
+// What is burnished and what is matte hangs on a triple each, whatever the shares of a zone.
+const secondsOf = ({ way, losses }: ZoneLeaf) =>
+  losses.secondLayings
+    .filter(({ share }) => share > 0)
+    .map(({ finish, share, percent }) => ({ key: `second/${finish}/${way}`, share, percent }));
 
 const fraction = (percent: Triple): Triple => mapTriple(percent, (figure) => figure / 100);
 
@@ -47,7 +41,7 @@ function lossDraws(leaf: ZoneLeaf): RiskDraw[] {
   return [
     { key: keys.breakageKey, triple: fraction(leaf.losses.breakage_percent) },
     { key: keys.faultingKey, triple: fraction(leaf.losses.faulting_percent) },
-    { key: keys.secondLayingKey, triple: fraction(leaf.losses.second_percent) },
+    ...secondsOf(leaf).map(({ key, percent }) => ({ key, triple: fraction(percent) })),
   ];
 }
 
@@ -60,7 +54,8 @@ function useOf(zone: WorkedZone, leaf: ZoneLeaf, cost: HourCost): RiskLeafUse {
     leaves > 0
       ? { hoursPerLeaf: hours / leaves, costPerLeaf_minor: cost_minor / leaves }
       : { hoursPerLeaf: 0, costPerLeaf_minor: 0 };
-  return { netLeaves: leaf.netLeaves, ...lossKeys(leaf), ...perLeaf, spreadKey };
+  const secondLayings = secondsOf(leaf).map(({ key, share }) => ({ key, share }));
+  return { netLeaves: leaf.netLeaves, ...lossKeys(leaf), secondLayings, ...perLeaf, spreadKey };
 }
 
 /** What 0, 1, 2 … booklets cost, well past the most that could be needed. */
@@ -86,7 +81,7 @@ function productRisk(total: LeafTotal, work: EstimateWork, at: { card: RateCard;
   ];
 }
 
-/** The leaf of an estimate as risk sees it: one draw for each way of laying and loss, whole booklets, laying that follows the leaves. */
+/** The leaf of an estimate as risk sees it: one draw for each triple of a loss, whole booklets, laying that follows the leaves. */
 export function riskLeaf(work: EstimateWork, card: RateCard, priced: Priced): LeafRisk {
   const laid = work.zones.flatMap((zone) => (zone.leaf ? [zone.leaf] : []));
   const losses = new Map(laid.flatMap(lossDraws).map((draw) => [draw.key, draw]));

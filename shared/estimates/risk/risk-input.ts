@@ -22,7 +22,8 @@ export interface RiskLeafUse {
   readonly netLeaves: number;
   readonly breakageKey: string;
   readonly faultingKey: string;
-  readonly secondLayingKey: string;
+  /** Each finish is laid again on its share (0…1) of the zone. */
+  readonly secondLayings: readonly { readonly key: string; readonly share: number }[];
   /** Laying goes by gross leaves: hours a leaf, their cost, and the draw (a factor) that spreads them, if any. */
   readonly hoursPerLeaf: number;
   readonly costPerLeaf_minor: number;

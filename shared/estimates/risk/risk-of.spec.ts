@@ -39,7 +39,7 @@ const use: RiskLeafUse = {
   netLeaves: 100,
   breakageKey: 'breakage',
   faultingKey: 'faulting',
-  secondLayingKey: 'second',
+  secondLayings: [{ key: 'second', share: 1 }],
   hoursPerLeaf: 0.02,
   costPerLeaf_minor: 66,
   spreadKey: 'spread',

@@ -25,9 +25,10 @@ function columnOf(columns: RiskColumns, key: string): Float64Array {
 /** Gross leaves: net × (1 + second + faulting × (1 − second)) ÷ (1 − breakage), in every trial. */
 function grossLeaves(use: RiskLeafUse, columns: RiskColumns): Float64Array {
   const faulting = columnOf(columns, use.faultingKey);
-  const second = columnOf(columns, use.secondLayingKey);
+  const seconds = use.secondLayings.map(({ key, share }) => ({ share, drawn: columnOf(columns, key) }));
   return columnOf(columns, use.breakageKey).map((breakage, trial) => {
-    const laid = 1 + second[trial] + faulting[trial] * (1 - second[trial]);
+    const second = seconds.reduce((sum, { share, drawn }) => sum + share * drawn[trial], 0);
+    const laid = 1 + second + faulting[trial] * (1 - second);
     return (use.netLeaves * laid) / (1 - breakage);
   });
 }
