@@ -1,2 +1,2 @@
 /** Which calculator worked a figure; raised by hand whenever a golden issue changes. */
-export const calculatorVersion = 5;
+export const calculatorVersion = 6;

@@ -2,6 +2,7 @@ import { chosenDraft } from '#shared/estimates/chosen-draft';
 import type { Choice, Draft } from '#shared/estimates/draft';
 import { estimateWork, type EstimateWork } from '#shared/estimates/estimate-work';
 import type { CostFigures, Figures, PurchaseFigures } from '#shared/estimates/figures';
+import { leafAsDrawn } from '#shared/estimates/leaf-as-drawn';
 import { overlappingAlternatives } from '#shared/estimates/alternatives-overlapping';
 import { emptyAlternatives } from '#shared/estimates/is-empty-alternative';
 import { ornamentZoneFindings } from '#shared/estimates/ornament-zone-findings';
@@ -131,13 +132,13 @@ const costFigures = ({ work, input }: PreparedEstimate, price: Price, risk: Risk
   findings: [...price.findings, ...pricesOfOtherCurrency(input)],
 });
 
-/** All figures of a prepared estimate: money in whole minor units, stages of the gross price. Without risk, a contingency from risk is 0. */
+/** All figures of a prepared estimate: money in whole minor units, stages of the gross price. Without risk, a contingency from risk is 0 and leaf has no range. */
 export function estimateFigures(prepared: PreparedEstimate, risk: Risk | null): Figures {
   const { work, input, draft } = prepared;
   const price = priceOf(pricedFrom(prepared, risk));
   const { deposit_percent, parts, retention_percent } = draft.settings.stages;
   const stages_percent = parts.length > 0 ? parts.map((part) => part.percent) : [100];
-  const worked = workFigures(work, draft.settings, input.card);
+  const worked = leafAsDrawn(workFigures(work, draft.settings, input.card), risk);
   return {
     ...worked,
     findings: [

@@ -101,6 +101,7 @@ const risk = z.strictObject({
   hours: percentiles,
   direct_minor: percentiles,
   leaf: z.array(z.strictObject({ productId: text, leaves: percentiles, booklets: percentiles })),
+  booklets: percentiles.nullable().default(null),
   atPercentile_minor: minor,
   contingency_minor: minor,
   reasons,

@@ -84,17 +84,12 @@ export interface CarvingFigures extends Pick<CarvingResult, 'rows' | 'total' | '
 /** Leaf of one product over the estimate. */
 export interface LeafFigures extends Pick<
   LeafTotal,
-  | 'productId'
-  | 'netLeaves'
-  | 'grossLeaves'
-  | 'grossLeaves_p10'
-  | 'grossLeaves_p90'
-  | 'booklets'
-  | 'coverage'
-  | 'mass_grams'
-  | 'reasons'
+  'productId' | 'netLeaves' | 'grossLeaves' | 'booklets' | 'coverage' | 'mass_grams' | 'reasons'
 > {
   readonly name: string;
+  /** Of the job's own trials. */
+  readonly grossLeaves_p10: number;
+  readonly grossLeaves_p90: number;
 }
 
 /** Hours of one grade over the estimate, carving and gilding together, set-up included. */
@@ -111,6 +106,7 @@ export interface Tally {
   readonly carving_hours: Triple;
   readonly handsOn_hours: Triple;
   readonly booklets: number;
+  /** Of the job's own trials, all products together. */
   readonly booklets_p10: number;
   readonly booklets_p90: number;
   readonly workingDays: number;

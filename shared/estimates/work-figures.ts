@@ -21,9 +21,7 @@ import type {
 import type { MeasuredMember } from '#shared/estimates/measured-member';
 import type { EstimateSettings } from '#shared/estimates/settings';
 import type { WorkedZone } from '#shared/estimates/worked-zone';
-import { bookletsFor } from '#shared/leaf/booklets-for';
 import { layPlanBands } from '#shared/leaf/lay-plan-bands';
-import type { LeafProduct } from '#shared/leaf/leaf-product';
 import type { RateCard } from '#shared/rate-cards/rate-card';
 import { groupedBy } from '#shared/units/grouped-by';
 import { tripleSum } from '#shared/units/triple-sum';
@@ -134,32 +132,11 @@ function carvingFigures({ carving }: EstimateWork, card: RateCard): CarvingFigur
 }
 
 const leafFigures = (work: EstimateWork, card: RateCard): LeafFigures[] =>
-  work.leaf.map(
-    ({
-      productId,
-      netLeaves,
-      grossLeaves,
-      grossLeaves_p10,
-      grossLeaves_p90,
-      booklets,
-      coverage,
-      mass_grams,
-      reasons,
-    }) => ({
-      ...{
-        productId,
-        netLeaves,
-        grossLeaves,
-        grossLeaves_p10,
-        grossLeaves_p90,
-        booklets,
-        coverage,
-        mass_grams,
-        reasons,
-      },
-      name: nameOf(card.leaf.products, productId),
-    }),
-  );
+  work.leaf.map(({ productId, netLeaves, grossLeaves, booklets, coverage, mass_grams, reasons }) => ({
+    ...{ productId, netLeaves, grossLeaves, booklets, coverage, mass_grams, reasons },
+    ...{ grossLeaves_p10: grossLeaves.likely, grossLeaves_p90: grossLeaves.likely },
+    name: nameOf(card.leaf.products, productId),
+  }));
 
 function gradeFigures(work: EstimateWork, card: RateCard): GradeFigures[] {
   return card.money.grades.flatMap(({ id, name }) => {
@@ -168,40 +145,27 @@ function gradeFigures(work: EstimateWork, card: RateCard): GradeFigures[] {
   });
 }
 
-function bookletsAt(
-  work: EstimateWork,
-  card: RateCard,
-  leavesOf: (total: EstimateWork['leaf'][number]) => number,
-): number {
-  const products = new Map<string, LeafProduct>(card.leaf.products.map((product) => [product.id, product]));
-  return sum(
-    work.leaf.map((total) => {
-      const product = products.get(total.productId);
-      return product ? bookletsFor(product, leavesOf(total)) : 0;
-    }),
-  );
-}
-
 type TallyOfWork = Omit<Tally, 'workingDays' | 'weeks'>;
 
-const tallyOf = (work: EstimateWork, card: RateCard, members: readonly MemberFigures[]): TallyOfWork => ({
-  members: sum(work.members.map(({ member }) => member.count)),
-  true_mm2: sum(members.map((member) => member.true_mm2)),
-  carving_hours: work.carving.total,
-  handsOn_hours: tripleSum(work.zones.map((zone) => zone.handsOn.hours)),
-  booklets: sum(work.leaf.map((total) => total.booklets)),
-  booklets_p10: bookletsAt(work, card, (total) => total.grossLeaves_p10),
-  booklets_p90: bookletsAt(work, card, (total) => total.grossLeaves_p90),
-});
+function tallyOf(work: EstimateWork, members: readonly MemberFigures[]): TallyOfWork {
+  const booklets = sum(work.leaf.map((total) => total.booklets));
+  return {
+    members: sum(work.members.map(({ member }) => member.count)),
+    true_mm2: sum(members.map((member) => member.true_mm2)),
+    carving_hours: work.carving.total,
+    handsOn_hours: tripleSum(work.zones.map((zone) => zone.handsOn.hours)),
+    ...{ booklets, booklets_p10: booklets, booklets_p90: booklets },
+  };
+}
 
-/** The figures of an estimate's work, without a word of money: areas mm², hours decimal, leaves not rounded, booklets whole. */
+/** The figures of an estimate's work, without a word of money: areas mm², hours decimal, leaves not rounded, booklets whole; without trials no range of leaf. */
 export function workFigures(work: EstimateWork, settings: EstimateSettings, card: RateCard): WorkFigures {
   const { dry, findings } = dryFigures(work, settings, card);
   const memberOf = memberOfUse(work);
   const members = membersFigures(work, memberOf, card);
   return {
     calculatorVersion,
-    tally: { ...tallyOf(work, card, members), workingDays: dry.elapsed_workingDays, weeks: dry.elapsed_weeks },
+    tally: { ...tallyOf(work, members), workingDays: dry.elapsed_workingDays, weeks: dry.elapsed_weeks },
     members,
     zones: zonesFigures(work, card),
     uses: useFigures(work, memberOf, card),

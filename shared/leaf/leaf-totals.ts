@@ -18,8 +18,6 @@ export interface LeafTotal {
   readonly trueArea_mm2: number;
   readonly netLeaves: number;
   readonly grossLeaves: Triple;
-  readonly grossLeaves_p10: number;
-  readonly grossLeaves_p90: number;
   /** Whole booklets of the likely need, and how they are bought. */
   readonly booklets: number;
   readonly purchase: LeafPurchase;
@@ -74,8 +72,6 @@ function leafTotal(product: LeafProduct, zones: readonly ZoneLeaf[], card: LeafC
     trueArea_mm2,
     netLeaves,
     grossLeaves,
-    grossLeaves_p10: sum((zone) => zone.grossLeaves_p10),
-    grossLeaves_p90: sum((zone) => zone.grossLeaves_p90),
     booklets,
     purchase,
     price: card.charge === 'booklets' ? purchase.price : priceByTheLeaf(product, leaves),

@@ -61,7 +61,7 @@ function lossReasons(worked: Worked): Reason[] {
   ];
 }
 
-/** Why a zone takes so many leaves: laying, share, relief, net, each loss, and the leaves with their P10–P90 range. */
+/** Why a zone takes so many leaves: laying, share, relief, net, each loss, and the leaves, from where every loss is at its own tenth to where every one is at its ninetieth percentile. */
 export function zoneLeafReasons(input: ZoneLeafInput, worked: Worked): Reason[] {
   if (!worked.laying) return [];
   const range = { low: worked.grossLeaves_p10, high: worked.grossLeaves_p90 };

@@ -89,7 +89,7 @@ describe('zoneLeaf', () => {
       'second laying: 5',
       'faulting of the rest: 12',
       'breakage: 0.95',
-      'leaves, 40.1 to 46.2: 41.9',
+      'leaves, 40.1 to 46.2 where all losses go well or badly at once: 41.9',
     ]);
   });
 

@@ -2,7 +2,7 @@ import { percentileOf } from '#shared/estimates/risk/percentile-of';
 import type { LeafPercentiles, Percentiles, Risk } from '#shared/estimates/risk/risk';
 import { likelyColumns, riskColumns } from '#shared/estimates/risk/risk-columns';
 import type { RiskInput } from '#shared/estimates/risk/risk-input';
-import { type LeafOutcomes, riskOutcomes } from '#shared/estimates/risk/risk-outcomes';
+import { type LeafOutcomes, type RiskOutcomes, riskOutcomes } from '#shared/estimates/risk/risk-outcomes';
 import { D, type MinorUnits } from '#shared/money/decimal';
 import { roundMinor } from '#shared/money/round-minor';
 import { settled } from '#shared/money/settled';
@@ -22,6 +22,9 @@ function percentilesOf(figures: Float64Array, atLikely: number, finish: Finish):
   const at = (percentile: number) => finish(percentileOf(figures, percentile));
   return { atLikely: finish(atLikely), p10: at(10), p50: at(50), p80: at(80), p90: at(90) };
 }
+
+const allBooklets = ({ hours, leaf }: RiskOutcomes): Float64Array =>
+  hours.map((_, trial) => leaf.reduce((sum, { booklets }) => sum + booklets[trial], 0));
 
 function leafPercentiles(drawn: LeafOutcomes, likely: LeafOutcomes): LeafPercentiles {
   const of = (figures: Float64Array, atLikely: number) => percentilesOf(rising(figures), atLikely, settled);
@@ -60,6 +63,7 @@ export function riskOf(input: RiskInput): Risk {
     hours: percentilesOf(rising(drawn.hours), likely.hours[0], settled),
     direct_minor,
     leaf: drawn.leaf.map((leaf, place) => leafPercentiles(leaf, likely.leaf[place])),
+    booklets: percentilesOf(rising(allBooklets(drawn)), allBooklets(likely)[0], settled),
     atPercentile_minor,
     contingency_minor: Math.max(0, sumMinor([atPercentile_minor, -direct_minor.atLikely])),
   };

@@ -26,6 +26,8 @@ export interface Risk {
   /** Direct cost, whole minor units. */
   readonly direct_minor: Percentiles;
   readonly leaf: readonly LeafPercentiles[];
+  /** Booklets of all products together; null in issues drawn before these were told. */
+  readonly booklets: Percentiles | null;
   /** Direct cost at the percentile asked for. */
   readonly atPercentile_minor: MinorUnits;
   /** max(0, percentile − direct cost at the likely values). */

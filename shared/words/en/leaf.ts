@@ -26,8 +26,9 @@ export const leaf = {
     'Second laying, water gilt, {share_percent} burnished and the rest matte, {way, select, sheets {sheets} lays {lays} other {patches}}',
   'leaf-faulting': 'faulting of the rest',
   'leaf-breakage': 'breakage',
-  'leaf-leaves': 'leaves, {low, number, ::.#} to {high, number, ::.#}',
-  'leaf-rolls': 'rolls of ribbon, {low, number, ::.##} to {high, number, ::.##}',
+  'leaf-leaves': 'leaves, {low, number, ::.#} to {high, number, ::.#} where all losses go well or badly at once',
+  'leaf-rolls':
+    'rolls of ribbon, {low, number, ::.##} to {high, number, ::.##} where all losses go well or badly at once',
   'leaf-total-net': 'net, all zones',
   'leaf-total-gross': 'with second laying, faulting and breakage',
   'leaf-total-booklets': 'whole booklets of {leaves, plural, one {one leaf} other {# leaves}}',
