@@ -10,7 +10,8 @@ export interface StepLoad {
 
 /**
  * Days on which a step of a lot is set up: as many productive days as its hours fill, or a day for each coat that has to dry a working day or longer
- * before the next. None for a step without work, or for recutting, which is carver's work.
+ * before the next. Not the days of the sequence, which set-up makes longer itself. None for a step without work, or for recutting, which is carver's
+ * work.
  */
 export function setUpDays(step: BuildUpStep, load: StepLoad, card: BuildUpCard): number {
   if (load.hours <= 0 || step.work.way === 'recutting') return 0;

@@ -78,7 +78,15 @@ describe('the sequence of a lot', () => {
 
   it('counts hands-on with its set-up, and drying between coats', () => {
     // 3.6 h of gesso in one day, with 0.4 h of set-up; seven waits of 30 min and a day before smoothing.
-    expect(stepOf('water-burnished', 'gesso')).toMatchObject({ handsOn_minutes: 240, coats: 8 });
+    const gesso = stepOf('water-burnished', 'gesso');
+    expect(gesso).toMatchObject({ handsOn_minutes: 240, coats: 8 });
+    expect(gesso?.reasons).toContainEqual(
+      expect.objectContaining({
+        code: 'buildup-hours-set-up',
+        figure: 0.4,
+        values: expect.objectContaining({ days: 1 }),
+      }),
+    );
     // 0.25 h and 0.4 h of size coat, 12 h; 0.4 h for one coat of wash, 0.4 h of set-up, 2 h.
     expect(sequence('toned-back')).toMatchObject({ handsOn_minutes: 39 + 48, drying_minutes: 720 + 120 });
   });

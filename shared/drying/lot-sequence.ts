@@ -61,7 +61,7 @@ function sequenceStep(
   const times = timesOf(step, factor);
   const { stepId, kind, name, gradeId, coats } = lotStep;
   const handsOn_minutes = countUp((lotStep.hours + lotStep.setUp_hours) * 60);
-  const told = [...reasons, windowReason(name, times, factor)];
+  const told = [...lotStep.reasons, ...reasons, windowReason(name, times, factor)];
   return {
     stepId,
     kind,

@@ -11,7 +11,7 @@ export const buildups = {
   'buildup-hours-restoring': '{step}: {area_mm2} at {rate_hours} a square metre.',
   'buildup-hours-recutting': '{step}: as worked out with the carving, and counted there.',
   'buildup-hours-set-up':
-    '{step}: set-up of {rate_hours} on {days, plural, one {# day} other {# days}} for the whole lot.',
+    '{step}: set-up of {rate_hours} on {days, plural, one {# day} other {# days}} for the whole lot, as many as its hours and its drying take by themselves. In the sequence it may stand on more days, since a working day can end in between; these are not charged.',
   'buildup-ground-thickness': 'Ground of {coats, plural, one {# coat} other {# coats}}, {thickness_mm} in all.',
   'buildup-ground-thick':
     'The ground comes to {thickness_mm}, more than {limit_mm}, on carving that is not recut: detail will drown. Take fewer coats, or recut in gesso.',

@@ -5,6 +5,7 @@ import { lotWorks } from '#shared/buildups/lot-works';
 import { zoneForSpecs } from '#shared/buildups/zone-for-specs';
 import { lotSequence } from '#shared/drying/lot-sequence';
 import { startDrying } from '#shared/drying/start-drying';
+import { Explanation } from '../ui/figure/explanation';
 import { signIn, words } from '../../test/sign-in';
 import { LotSteps } from './lot-steps';
 
@@ -35,6 +36,15 @@ describe('LotSteps', () => {
     expect(gesso?.[0]).toContain('All coats within 2 d.');
     expect(rows[0]?.[0]).toContain('waits until the carving is approved');
     expect(rows.find(([name]) => name?.startsWith('Wet and lay'))?.[0]).toContain('revive the bole with damp breath');
+    // What of its hands-on time is set-up is told of the time, not of the drying.
+    const buttons = [...(fixture.nativeElement as HTMLElement).querySelectorAll<HTMLButtonElement>('tbody button')];
+    const told = buttons.map((button) => {
+      button.click();
+      return TestBed.inject(Explanation)
+        .current()
+        ?.reasons.map(({ code }) => code);
+    });
+    expect(told.filter((codes) => codes?.includes('buildup-hours-set-up'))).toContainEqual(['buildup-hours-set-up']);
     // An edge nobody protects takes no time, so it is no step here.
     expect(rows.some(([name]) => name === 'Protect the edge')).toBe(false);
   });

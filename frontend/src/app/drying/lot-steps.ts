@@ -2,11 +2,14 @@ import { ChangeDetectionStrategy, Component, computed, inject, input } from '@an
 import { dayLength_minutes, dayOf } from '#shared/drying/day-length-minutes';
 import type { SequenceStep } from '#shared/drying/sequence-step';
 import type { Finding } from '#shared/words/finding';
+import type { Reason } from '#shared/words/reason';
 import { Formats } from '../core/formats/formats';
 import { Words } from '../core/formats/words';
 import type { Explained } from '../ui/figure/explained';
 import { Figure } from '../ui/figure/figure';
 import type { WorkedLot } from './worked-lot';
+
+const isSetUp = ({ code }: Reason): boolean => code === 'buildup-hours-set-up';
 
 /** The steps of one lot in words and figures: what the ribbon shows, for whoever reads it, hears it or prints it. */
 @Component({
@@ -33,7 +36,7 @@ export class LotSteps {
       id: step.stepId,
       name: step.name,
       coats: this.formats.number(step.coats, 0),
-      handsOn: this.minutes(step.handsOn_minutes),
+      handsOn: this.handsOn(step),
       between: step.coats > 1 ? this.minutes(step.betweenCoats_minutes) : '',
       dries: step.opens_minutes > 0 ? this.minutes(step.opens_minutes) : $localize`at once`,
       explained: this.explained(step),
@@ -47,9 +50,22 @@ export class LotSteps {
     return this.formats.figure('minutes', minutes);
   }
 
+  /** Hands-on time, which opens to the days of set-up in it. */
+  private handsOn({ stepId, name, handsOn_minutes, reasons }: SequenceStep) {
+    const text = this.minutes(handsOn_minutes);
+    const heading = $localize`${name}:step: takes ${text}:time:`;
+    const setUp = reasons.filter(isSetUp);
+    const explained = { id: `hands on ${this.lot().lotId} ${stepId}`, heading, reasons: setUp };
+    return { text, explained: setUp.length > 0 ? explained : undefined };
+  }
+
   private explained(step: SequenceStep): Explained {
     const heading = $localize`${step.name}:step: dries in ${this.minutes(step.opens_minutes)}:time:`;
-    return { id: `dry ${this.lot().lotId} ${step.stepId}`, heading, reasons: step.reasons };
+    return {
+      id: `dry ${this.lot().lotId} ${step.stepId}`,
+      heading,
+      reasons: step.reasons.filter((reason) => !isSetUp(reason)),
+    };
   }
 
   private window({ opens_minutes, closes_minutes, endsInWindow }: SequenceStep): string {
