@@ -16,12 +16,13 @@ interface Shaped {
 function shaped(members: readonly Member[]): Shaped[] {
   const shapes = new Map<string, Member[]>();
   for (const member of members) {
-    const key = canonicalJson(member.shape);
+    const openings = member.openings.map(({ shape, count }) => ({ shape, count }));
+    const key = canonicalJson({ shape: member.shape, openings });
     shapes.set(key, [...(shapes.get(key) ?? []), member]);
   }
   return [...shapes.values()].map((alike) => ({
     names: [...new Set(alike.map((member) => member.name))],
-    views: memberDrawing(alike[0].shape).views,
+    views: memberDrawing(alike[0].shape, alike[0].openings).views,
   }));
 }
 
@@ -54,7 +55,9 @@ export function drawnMembers(pdf: Pdf, members: readonly Member[], setting: Draw
     return views.map((view) => {
       const name = `${caption}, ${words.say('paper-view', { view: view.view })}`;
       const { figure, scale } = viewFigure(pdf, measured(view, isForTheBench), { box, name, length: words.length });
-      return { figure, caption, note: words.say('paper-view-scale', { view: view.view, scale }) };
+      const drawn = words.say('paper-view-scale', { view: view.view, scale });
+      const hasOpenings = view.paths.some(({ kind }) => kind === 'opening');
+      return { figure, caption, note: hasOpenings ? words.say('paper-view-openings', { drawn }) : drawn };
     });
   });
 }

@@ -4,9 +4,9 @@ export interface DrawingPoint {
   readonly y_mm: number;
 }
 
-/** A stroke of a view: SVG path data in mm, of absolute M, L, A, C and Z only; `cut` is an edge of a flute, reed or groove. */
+/** A stroke of a view: SVG path data in mm, of absolute M, L, A, C and Z only; `cut` is an edge of a flute, reed or groove, `opening` one whose place nobody gave. */
 export interface DrawingPath {
-  readonly kind: 'outline' | 'hidden' | 'axis' | 'cut';
+  readonly kind: 'outline' | 'hidden' | 'opening' | 'axis' | 'cut';
   readonly data: string;
 }
 

@@ -64,23 +64,33 @@ function cornersOf(points: readonly { readonly x_mm: number; readonly y_mm: numb
   return turned.map(({ x_mm, y_mm }) => spot(x_mm - left_mm, y_mm - top_mm));
 }
 
-/** The face of a flat shape with its overall dimensions, in mm; a triangle is drawn with its apex above the middle of its base. */
+/** The corners of a flat figure, in mm, its box beginning at 0, 0; a triangle has its apex above the middle of its base. None for what is round. */
+export function flatCorners(shape: FlatShape): DrawingPoint[] {
+  switch (shape.kind) {
+    case 'rectangle':
+      return uprightCorners(shape.length_mm, shape.height_mm);
+    case 'triangle':
+      return [spot(shape.base_mm / 2, 0), spot(shape.base_mm, shape.height_mm), spot(0, shape.height_mm)];
+    case 'polygon':
+      return cornersOf(shape.points);
+    default:
+      return [];
+  }
+}
+
+/** The face of a flat shape with its overall dimensions, in mm. */
 export function flatFace(shape: FlatShape): DrawingView {
   switch (shape.kind) {
     case 'rectangle':
-      return straightFace(
-        uprightCorners(shape.length_mm, shape.height_mm),
-        uprightCuts(shape.fluting, shape.length_mm, shape.height_mm),
-      );
+      return straightFace(flatCorners(shape), uprightCuts(shape.fluting, shape.length_mm, shape.height_mm));
     case 'triangle':
-      return straightFace([spot(shape.base_mm / 2, 0), spot(shape.base_mm, shape.height_mm), spot(0, shape.height_mm)]);
+    case 'polygon':
+      return straightFace(flatCorners(shape));
     case 'circle':
       return roundFace([shape.diameter_mm, shape.diameter_mm]);
     case 'ellipse':
       return roundFace([shape.length_mm, shape.height_mm]);
     case 'ring':
       return roundFace([shape.outerDiameter_mm, shape.outerDiameter_mm], shape.innerDiameter_mm);
-    case 'polygon':
-      return straightFace(cornersOf(shape.points));
   }
 }

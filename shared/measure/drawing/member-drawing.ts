@@ -1,5 +1,6 @@
 import { bandView } from '#shared/measure/drawing/band-view';
 import type { Drawing, DrawingView } from '#shared/measure/drawing/drawing';
+import { faceOpenings } from '#shared/measure/drawing/face-openings';
 import { flatFace } from '#shared/measure/drawing/flat-face';
 import { straightLegViews, stationsElevation } from '#shared/measure/drawing/leg-views';
 import { planView } from '#shared/measure/drawing/plan-view';
@@ -8,6 +9,7 @@ import { solidViews } from '#shared/measure/drawing/solid-views';
 import { turnedElevation } from '#shared/measure/drawing/turned-elevation';
 import { helicoidElevation, twistedViews } from '#shared/measure/drawing/twisted-views';
 import type { MouldingShape } from '#shared/measure/moulding-shape';
+import type { Opening } from '#shared/measure/opening';
 import type { Shape } from '#shared/measure/shape';
 
 function mouldingViews({ profile, plan, fluting }: MouldingShape): DrawingView[] {
@@ -49,6 +51,13 @@ function viewsOf(shape: Shape): DrawingView[] {
 
 /**
  * A member drawn to scale in mm from the numbers its surface is worked from: section and plan of a moulding, elevation of turned
- * work, legs and solids, the face of flat work, an unrolled band with its stretches; flutes, reeds and grooves as they are cut. The shape must be one its schema allows.
+ * work, legs and solids, the face of flat work, an unrolled band with its stretches; flutes, reeds and grooves as they are cut; openings of a flat face
+ * dashed along its middle. The shape must be one its schema allows.
  */
-export const memberDrawing = (shape: Shape): Drawing => ({ views: viewsOf(shape) });
+export function memberDrawing(shape: Shape, openings: readonly Opening[] = []): Drawing {
+  // The middle of a ring is its hole.
+  if (openings.length === 0 || shape.kind === 'ring') return { views: viewsOf(shape) };
+  return {
+    views: viewsOf(shape).map((view) => ({ ...view, paths: [...view.paths, ...faceOpenings(view, openings)] })),
+  };
+}

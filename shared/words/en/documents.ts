@@ -91,6 +91,7 @@ export const documents = {
   'paper-view': '{view, select, face {face} profile {section} plan {plan} elevation {elevation} other {unrolled}}',
   'paper-view-scale':
     '{view, select, face {face} profile {section} plan {plan} elevation {elevation} other {unrolled}}, {scale}',
+  'paper-view-openings': '{drawn}. Openings are dashed: take their place from the piece.',
   'paper-buildups': 'How the surfaces are built up',
   'paper-buildups-note':
     'From the wood at the bottom to the finish on top, with the number of coats. The layers are drawn thick enough to see, not to scale.',
@@ -181,6 +182,9 @@ export const documents = {
   'bench-members': 'Members',
   'bench-count': '{count, plural, one {one} other {# alike}}',
   'bench-surface': 'developed surface {developed_mm2} each',
+  'bench-openings': 'Openings in each: {openings}.',
+  'bench-opening':
+    '{count, number} × {shape, select, rectangle {rectangle {length_mm} by {height_mm}} triangle {triangle {length_mm} by {height_mm}} circle {circle {length_mm} across} ellipse {oval {length_mm} by {height_mm}} ring {ring {length_mm} across, {height_mm} within} polygon {drawn shape within {length_mm} by {height_mm}} other {area of {area_mm2}}}',
   'bench-girth': 'girth {girth_mm}',
   'bench-run': 'run {run_mm}',
   'bench-carving': 'carving {carving_hours} in all',

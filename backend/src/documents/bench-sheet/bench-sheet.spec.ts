@@ -1,6 +1,8 @@
 import { leaveSample, factsOf, pagesOf, textOfPaper } from '../../../../test/documents/paper-text';
 import { longDraft, smallDraft } from '../../../../test/documents/sample-draft';
 import { sampleSnapshot } from '../../../../test/documents/sample-snapshot';
+import { memberForSpecs } from '#shared/estimates/member-for-specs';
+import type { Opening } from '#shared/measure/opening';
 import { benchSheet } from './bench-sheet';
 
 jest.setTimeout(60_000);
@@ -49,6 +51,20 @@ describe('the bench sheet of a piece', () => {
     expect(sheet).toContain('Wood Leg, heron Step');
     // The edge is recut and gets eight coats, the carved legs four.
     expect(sheet).not.toMatch(/Gesso +4 to 8 /);
+  });
+
+  it('names what is cut out of a member, and draws it where the face is flat', async () => {
+    const own = smallDraft();
+    const openings: Opening[] = [
+      { id: 'grip', count: 2, shape: { kind: 'rectangle', length_mm: 120, height_mm: 60 } },
+      { id: 'hole', count: 1, shape: { kind: 'circle', diameter_mm: 25 } },
+    ];
+    const panel = memberForSpecs({ id: 'panel', pieceId: 'piece-1', name: 'Panel', openings });
+    const pierced = sampleSnapshot({ ...own, members: [...own.members, panel] });
+    const sheet = textOfPaper(await benchSheet({ ...request, draft: pierced.draft, figures: pierced.figures }));
+    expect(sheet).toContain('Openings in each: 2 × rectangle 120 mm by 60 mm, 1 × circle 25 mm across.');
+    expect(sheet).toMatch(/face, 1 : \d+\. Openings are dashed: take their place from the piece\./);
+    expect(text).not.toMatch(/[Oo]penings/);
   });
 
   it('says how the leaf is laid', () => {

@@ -1,5 +1,7 @@
 import type { UseFigures, ZoneFigures } from '#shared/estimates/figures';
 import type { Member } from '#shared/estimates/member';
+import { flatBox } from '#shared/measure/drawing/face-openings';
+import type { Opening } from '#shared/measure/opening';
 import { drawnMembers } from '../drawn-members';
 import { figureRows, figureWidth } from '../paper/figure-rows';
 import type { Block } from '../paper/flow';
@@ -23,6 +25,24 @@ function memberFacts({ request, words }: BenchContent, member: Member): string {
     ...(run_mm === null ? [] : [words.say('bench-run', { run_mm })]),
     ...(carving_hours.likely > 0 ? [words.say('bench-carving', { carving_hours: carving_hours.likely })] : []),
   ].join(' · ');
+}
+
+function openingText({ words }: BenchContent, { shape, count }: Opening): string {
+  const isMeasured = shape.kind === 'measured';
+  const box = isMeasured ? { width_mm: 0, height_mm: 0 } : flatBox(shape);
+  return words.say('bench-opening', {
+    count,
+    shape: shape.kind,
+    length_mm: box.width_mm,
+    height_mm: shape.kind === 'ring' ? shape.innerDiameter_mm : box.height_mm,
+    area_mm2: isMeasured ? shape.area_mm2 : 0,
+  });
+}
+
+function openingsText(content: BenchContent, { openings }: Member): string {
+  if (openings.length === 0) return '';
+  const texts = openings.map((opening) => openingText(content, opening));
+  return content.words.say('bench-openings', { openings: texts.join(', ') });
 }
 
 function useRow({ words }: BenchContent, use: UseFigures): TableRow {
@@ -107,7 +127,9 @@ function memberParts(pdf: Pdf, content: BenchContent, member: Member): Block[] {
   const facts = textBlock(pdf, memberFacts(content, member), { style: textStyles.note });
   const parts = [
     { ...facts, lead_pt: facts.lead_pt + (rows[0]?.lead_pt ?? 0) },
-    ...(member.note.trim() === '' ? [] : [textBlock(pdf, member.note, { before_pt: 3 })]),
+    ...[openingsText(content, member), member.note]
+      .filter((text) => text.trim() !== '')
+      .map((text) => textBlock(pdf, text, { before_pt: 3 })),
     ...rows,
     ...ornamentTable(pdf, content, member),
     ...zoneTable(pdf, content, member),

@@ -10,6 +10,7 @@ const strokes: Readonly<Record<DrawingPath['kind'], { weight_pt: number; colour:
   outline: { weight_pt: 0.9, colour: paperColours.ink, dash: [] },
   cut: { weight_pt: 0.35, colour: paperColours.muted, dash: [] },
   hidden: { weight_pt: 0.5, colour: paperColours.muted, dash: [3, 2] },
+  opening: { weight_pt: 0.6, colour: paperColours.ink, dash: [3, 2] },
   axis: { weight_pt: 0.4, colour: paperColours.muted, dash: [8, 2, 1.5, 2] },
 };
 

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import type { DrawingView } from '#shared/measure/drawing/drawing';
 import { memberDrawing } from '#shared/measure/drawing/member-drawing';
+import type { Opening } from '#shared/measure/opening';
 import type { Shape } from '#shared/measure/shape';
 import { ScaleDrawing } from '../ui/drawing/scale-drawing';
 
@@ -26,6 +27,9 @@ const viewNames: Readonly<Record<DrawingView['view'], string>> = {
     } @empty {
       <p class="muted" i18n>A measured area is given as a figure; there is nothing to draw.</p>
     }
+    @if (hasOpenings()) {
+      <p class="muted" i18n>Openings are dashed: take their place from the piece.</p>
+    }
   `,
   styles: `
     :host {
@@ -37,6 +41,11 @@ const viewNames: Readonly<Record<DrawingView['view'], string>> = {
     figure {
       flex: 1 1 240px;
       min-width: 0;
+      margin: 0;
+    }
+
+    figure ~ p {
+      flex-basis: 100%;
       margin: 0;
     }
 
@@ -55,16 +64,21 @@ const viewNames: Readonly<Record<DrawingView['view'], string>> = {
 })
 export class MemberPicture {
   readonly shape = input.required<Shape>();
+  readonly openings = input<readonly Opening[]>([]);
   readonly name = input.required<string>();
   readonly most_px = input(300);
 
   protected readonly views = computed(() =>
-    memberDrawing(this.shape()).views.map((drawn, index, all) => {
+    memberDrawing(this.shape(), this.openings()).views.map((drawn, index, all) => {
       const isSlim = drawn.box.height_mm > 1.5 * drawn.box.width_mm;
       const isSide = all.slice(0, index).some(({ view }) => view === drawn.view);
       // What is tall and slim may be taller: it stands beside its plan.
       return { drawn, isSlim, name: this.nameOf(drawn.view, isSide), most_px: this.most_px() * (isSlim ? 1.5 : 1) };
     }),
+  );
+
+  protected readonly hasOpenings = computed(() =>
+    this.views().some(({ drawn }) => drawn.paths.some(({ kind }) => kind === 'opening')),
   );
 
   private nameOf(view: DrawingView['view'], isSide: boolean): string {

@@ -12,7 +12,7 @@ export interface ScaleView {
 
 /** SVG path data in mm; `cut` is the thin edge of a flute, `gold` is drawn in gold, `leaf`, `pale` and `lap` are filled fields of a lay plan. */
 export interface ScalePath {
-  readonly kind: 'outline' | 'hidden' | 'axis' | 'cut' | 'gold' | 'leaf' | 'pale' | 'lap';
+  readonly kind: 'outline' | 'hidden' | 'opening' | 'axis' | 'cut' | 'gold' | 'leaf' | 'pale' | 'lap';
   readonly data: string;
 }
 
