@@ -44,12 +44,13 @@ export class CellWriting {
     return this.words.say(heading);
   }
 
-  /** The unit of a column; durations bring their own. */
+  /** The unit of a column; durations bring their own, and so do lengths in inches, since some beside them are whole in mm only. */
   unit({ unit }: CardColumn): string {
     if (unit === undefined || unit === 'minutes') return '';
     if (unit === 'money') return this.formats.currencySign();
     if (unit === 'celsius') return this.formats.temperatureSign();
-    return unit === 'mm' ? this.formats.lengthUnit() : this.words.say(`card-unit-${unit}`);
+    if (unit === 'mm') return this.formats.lengthUnit() === 'mm' ? 'mm' : '';
+    return this.words.say(`card-unit-${unit}`);
   }
 
   /** What may be chosen; undefined for a cell that is typed into. */
@@ -125,10 +126,10 @@ export class CellWriting {
   private numberText({ unit }: CardColumn, figure: number): string {
     if (unit === 'minutes') return durationText(figure, (one) => this.formats.typed(one));
     if (unit === 'celsius') return this.formats.typed(this.formats.degrees(figure));
-    if (unit !== 'mm') return this.formats.typed(figure);
-    const length = lengthFigure(figure, this.formats.lengthUnit(), this.formats.locale());
-    // A length that the workshop's unit cannot say exactly is written in full, so that it is not changed by being read back.
-    return length.isExact ? length.figure : `${this.formats.typed(figure)} mm`;
+    if (unit !== 'mm' || this.formats.lengthUnit() === 'mm') return this.formats.typed(figure);
+    const length = lengthFigure(figure, 'in', this.formats.locale());
+    // A length that inches cannot say exactly is written in mm, so that it is not changed by being read back.
+    return length.isExact ? `${length.figure} in` : `${this.formats.typed(figure)} mm`;
   }
 
   private chosen(choices: readonly CellChoice[], text: string): Read {
