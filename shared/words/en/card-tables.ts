@@ -246,8 +246,8 @@ export const cardTables = {
   'card-unit-mm': 'mm',
   'card-unit-hours': 'h',
   'card-unit-minutes': 'min',
-  'card-unit-days': 'days',
-  'card-unit-working-days': 'working days',
+  'card-unit-days': '{count, plural, one {day} other {days}}',
+  'card-unit-working-days': '{count, plural, one {working day} other {working days}}',
   'card-unit-percent': '%',
   'card-unit-grams': 'g',
   'card-unit-micrometres': 'µm',
@@ -255,5 +255,5 @@ export const cardTables = {
   'card-unit-density': 'kg/m³',
   'card-unit-newtons': 'N',
   'card-unit-celsius': '°C',
-  'card-unit-parts': 'parts',
+  'card-unit-parts': '{count, plural, one {part} other {parts}}',
 } as const;

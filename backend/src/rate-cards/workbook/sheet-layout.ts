@@ -1,5 +1,5 @@
 import { cardTables } from '#shared/rate-cards/tables/card-parts';
-import type { CardColumn, CardList, CardTable } from '#shared/rate-cards/tables/card-table';
+import type { CardColumn, CardList, CardTable, CellUnit } from '#shared/rate-cards/tables/card-table';
 import { words } from '../../platform/http/words';
 
 /** A column of a sheet: an id to find the row by, or a cell of the card. */
@@ -24,9 +24,12 @@ export function tablesAround({ within }: CardList): CardList[] {
   return table ? [...tablesAround(table), table] : [];
 }
 
+// A sheet names the unit of any figure there may be, so of several.
+const unitWord = (unit: Exclude<CellUnit, 'money'>): string => words(`card-unit-${unit}`, { count: 2 });
+
 const headingOf = ({ heading, unit }: CardColumn, currency: string): string => {
   if (unit === undefined) return words(heading);
-  return `${words(heading)} (${unit === 'money' ? currency : words(`card-unit-${unit}`)})`;
+  return `${words(heading)} (${unit === 'money' ? currency : unitWord(unit)})`;
 };
 
 const id = (heading: string): SheetColumn => ({ heading, isId: true });
@@ -59,5 +62,5 @@ export function sheetLayout(table: CardTable, currency: string): SheetLayout {
 /** The unit of a figure in words; money is in the currency named. */
 export const unitText = ({ unit }: CardColumn, currency: string): string => {
   if (unit === undefined) return '';
-  return unit === 'money' ? currency : words(`card-unit-${unit}`);
+  return unit === 'money' ? currency : unitWord(unit);
 };

@@ -32,7 +32,7 @@ export class CardEntry {
   private readonly value = computed(() => valueAt(this.store.content(), this.path()));
   protected readonly isEditable = this.store.isEditable;
   protected readonly heading = computed(() => this.label() ?? this.writing.heading(this.column()));
-  protected readonly unit = computed(() => this.writing.unit(this.column()));
+  protected readonly unit = computed(() => this.writing.unit(this.column(), this.value()));
   protected readonly isFigure = computed(() => ['number', 'decimal', 'hundredths'].includes(this.column().kind));
   protected readonly complaint = computed(() => this.store.remarks().of(this.path()));
   protected readonly text = computed(() => {

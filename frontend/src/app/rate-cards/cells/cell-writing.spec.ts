@@ -32,4 +32,15 @@ describe('CellWriting', () => {
       expect(shown(lengthUnit, mm)).toEqual({ text, unit, read: { ok: true, value: mm } });
     },
   );
+
+  it('names the unit of one figure as one, and of a column as several', () => {
+    signIn();
+    const writing = TestBed.inject(CellWriting);
+    const column = cellAt(['drying', 'holds_days', 'carving-approved'])!.column;
+    expect([writing.unit(column, 1), writing.unit(column, 1.5), writing.unit(column)]).toEqual([
+      'working day',
+      'working days',
+      'working days',
+    ]);
+  });
 });

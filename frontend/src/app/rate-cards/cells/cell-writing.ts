@@ -44,13 +44,13 @@ export class CellWriting {
     return this.words.say(heading);
   }
 
-  /** The unit of a column; durations bring their own, and so do lengths in inches, since some beside them are whole in mm only. */
-  unit({ unit }: CardColumn): string {
+  /** The unit of a column, or of one figure in it; durations bring their own, and so do lengths in inches, since some beside them are whole in mm only. */
+  unit({ unit }: CardColumn, value?: unknown): string {
     if (unit === undefined || unit === 'minutes') return '';
     if (unit === 'money') return this.formats.currencySign();
     if (unit === 'celsius') return this.formats.temperatureSign();
     if (unit === 'mm') return this.formats.lengthUnit() === 'mm' ? 'mm' : '';
-    return this.words.say(`card-unit-${unit}`);
+    return this.words.say(`card-unit-${unit}`, { count: value === 1 ? 1 : 2 });
   }
 
   /** What may be chosen; undefined for a cell that is typed into. */
