@@ -109,6 +109,15 @@ describe('figures as a reader wants them', () => {
     expect(plain(text)).toBe('That was too often in a short time. Please wait 1 h 30 min and try again.');
   });
 
+  it('tells whoever works in inches what the metric measure of a rate is', () => {
+    const values = { step: 'Cleaning', area_mm2: 92_903.04, rate_hours: 8 };
+    const inFeet = plain(say(en, american)('buildup-hours-restoring', values));
+    expect(inFeet).toBe('Cleaning: 1.00 ft² at 8 h a square metre (10.76 ft²).');
+    expect(plain(say(en, american)('card-column-timber-price'))).toBe('Price a cubic decimetre (61 in³)');
+    expect(plain(say(en, american)('card-column-ribbon-minutes'))).toBe('Ribbon, a metre (3.28 ft)');
+    expect(say(en, british)('card-column-timber-price')).toBe('Price a cubic decimetre');
+  });
+
   it('marks a length that is not exact in the unit it is read in', () => {
     expect(formatLength(860.425, 'mm', 'en-GB')).toBe('≈ 860.4 mm');
     expect(formatLength(860.425, 'in', 'en-GB')).toBe('33 7/8 in');

@@ -1,13 +1,27 @@
+import { millimetresPerFoot, millimetresPerInch } from '#shared/units/exact-factors';
 import { figureWriters } from '#shared/units/figure-writers';
-import { penFor, type ReaderSettings } from '#shared/units/pen';
+import { type Pen, penFor, type ReaderSettings } from '#shared/units/pen';
 import { Remembered } from '#shared/units/remembered';
 import type { ValueFormats } from '#shared/words/say';
+
+/** The metric measures that rates of a card go by, told in feet and inches. */
+function measuresInInches(pen: Pen): NonNullable<ValueFormats['measures']> {
+  const { mm2 } = figureWriters(pen);
+  return {
+    ofMetre: ` (${pen.withUnit('unit-feet', pen.number(1000 / millimetresPerFoot, 2))})`,
+    ofSquareMetre: ` (${mm2(1e6)})`,
+    ofSquareDecimetre: ` (${mm2(1e4)})`,
+    ofCubicDecimetre: ` (${pen.withUnit('unit-cubic-inches', pen.number((100 / millimetresPerInch) ** 3, 0))})`,
+  };
+}
 
 const formatsOf = (settings: ReaderSettings): ValueFormats => {
   const pen = penFor(settings);
   const writers = figureWriters(pen);
   const plain = (figure: number) => pen.number(figure, 3);
-  return { locale: settings.locale, write: (unit, figure) => (writers[unit] ?? plain)(figure) };
+  const { locale, lengthUnit } = settings;
+  const measures = lengthUnit === 'in' ? { measures: measuresInInches(pen) } : {};
+  return { locale, write: (unit, figure) => (writers[unit] ?? plain)(figure), ...measures };
 };
 
 /** Making formats is slow and using them is quick: those of the readers of late are kept. */

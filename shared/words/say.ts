@@ -6,7 +6,12 @@ export interface ValueFormats {
   readonly locale: string;
   /** `mm`, `mm2`, `minor`, `hours`, `minutes`, `percent`, `celsius` …: a figure with its unit, as text. */
   readonly write: (unit: string, figure: number) => string;
+  /** What metric measures are to a reader of others: “ (10.76 ft²)”, to stand behind the name of one in any message. */
+  readonly measures?: Partial<typeof noMeasures>;
 }
+
+/** Values every message may name without being given them; empty where the reader's own measures are metric. */
+export const noMeasures = { ofMetre: '', ofSquareMetre: '', ofSquareDecimetre: '', ofCubicDecimetre: '' };
 
 const messages = new Map<string, IntlMessageFormat>();
 
@@ -23,7 +28,7 @@ function messageFor(text: string, locale: string): IntlMessageFormat {
 const unitOf = (name: string): string | undefined => (name === 'rate_minor' ? name : /_([a-zµ0-9]+)$/.exec(name)?.[1]);
 
 function written(values: WordValues, formats: ValueFormats): Record<string, string | number> {
-  const out: Record<string, string | number> = {};
+  const out: Record<string, string | number> = { ...noMeasures, ...formats.measures };
   for (const [name, value] of Object.entries(values)) {
     const unit = unitOf(name);
     out[name] = typeof value === 'number' && unit ? formats.write(unit, value) : value;

@@ -1,4 +1,5 @@
 import * as ts from 'typescript';
+import { noMeasures } from '#shared/words/say';
 import { valuesOf, type Catalogue } from './catalogue-files';
 
 /** A code that is named together with the values it is to be worded with. */
@@ -73,7 +74,9 @@ export function saidValues(text: string, catalogue: Catalogue): { count: number;
     return message === undefined ? [] : [{ ...saying, wanted: valuesOf(message) }];
   });
   const missing = said.flatMap(({ code, given, line, wanted }) =>
-    wanted.filter((name) => !isGiven(name, given)).map((name) => `line ${line}: ${code} lacks ${name}`),
+    wanted
+      .filter((name) => !(name in noMeasures) && !isGiven(name, given))
+      .map((name) => `line ${line}: ${code} lacks ${name}`),
   );
   return { count: said.length, missing };
 }

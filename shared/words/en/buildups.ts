@@ -2,13 +2,13 @@ export const buildups = {
   'buildup-unknown': 'The rate card holds no build-up called {buildup}.',
   'buildup-edge-not-in-steps': '{edge_mm} of edge is to be protected, but {buildup} has no step that protects it.',
   'buildup-hours-by-area':
-    '{step}: {area_mm2} × {coats, plural, one {# coat} other {# coats}} × {rate_hours} a square metre × {factor, number} for the finish of the surface.',
+    '{step}: {area_mm2} × {coats, plural, one {# coat} other {# coats}} × {rate_hours} a square metre{ofSquareMetre} × {factor, number} for the finish of the surface.',
   'buildup-hours-painted':
-    '{step} on painted ornament: {area_mm2} × {coats, plural, one {# coat} other {# coats}} × {rate_hours} a square decimetre.',
+    '{step} on painted ornament: {area_mm2} × {coats, plural, one {# coat} other {# coats}} × {rate_hours} a square decimetre{ofSquareDecimetre}.',
   'buildup-hours-by-laying':
     '{step}: {laid, number} {way, select, lays {pieces} other {leaves}} handled, broken ones included, at {rate, number} minutes each.',
-  'buildup-hours-by-edge': '{step}: {edge_mm} of edge at {rate_hours} a metre.',
-  'buildup-hours-restoring': '{step}: {area_mm2} at {rate_hours} a square metre.',
+  'buildup-hours-by-edge': '{step}: {edge_mm} of edge at {rate_hours} a metre{ofMetre}.',
+  'buildup-hours-restoring': '{step}: {area_mm2} at {rate_hours} a square metre{ofSquareMetre}.',
   'buildup-hours-recutting': '{step}: as worked out with the carving, and counted there.',
   'buildup-hours-set-up':
     '{step}: set-up of {rate_hours} on {days, plural, one {# day} other {# days}} for the whole lot, as many as its hours and its drying take by themselves. In the sequence it may stand on more days, since a working day can end in between; these are not charged.',

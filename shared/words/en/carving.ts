@@ -18,7 +18,7 @@ export const carving = {
   'carving-recut-share':
     '{manner, select, french {recut in the French manner} other {recut in gesso}}, {share_percent} of {carving_hours}',
   'carving-recut-area':
-    '{manner, select, french {recut in the French manner} other {recut in gesso}}, {area_mm2} at {each_hours} a square metre',
+    '{manner, select, french {recut in the French manner} other {recut in gesso}}, {area_mm2} at {each_hours} a square metre{ofSquareMetre}',
   'carving-total-ornament': 'ornament',
   'carving-total-items': 'shaping and free carving',
   'carving-total-once': 'drawing, patterns and other work done once',

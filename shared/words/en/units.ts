@@ -1,6 +1,8 @@
 export const units = {
   'unit-mm': '{figure} mm',
   'unit-inches': '{figure} in',
+  'unit-feet': '{figure} ft',
+  'unit-cubic-inches': '{figure} in³',
   'unit-square-centimetres': '{figure} cm²',
   'unit-square-metres': '{figure} m²',
   'unit-square-inches': '{figure} in²',

@@ -42,6 +42,8 @@ const schemaOf = (kind: ExtraLine['kind']): z.ZodObject =>
 export class ExtraLineForm implements OnInit {
   private readonly injector = inject(Injector);
   private readonly formats = inject(Formats);
+  /** Timber is sold by the dm³ of the rate card. */
+  protected readonly volumeUnit = this.formats.lengthUnit() === 'in' ? $localize`dm³ (61 in³)` : $localize`dm³`;
   private readonly lines = inject(ExtraLinesStore);
   protected readonly store = inject(EstimateStore);
 
