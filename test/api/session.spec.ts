@@ -191,14 +191,18 @@ describe('its end', () => {
     const found: { out: number; left: number }[] = [];
     for (let round = 0; round < 20; round++) {
       const visitor = await newSession(email);
-      if (round === 0) await visitor.call(endOtherSessions);
+      await visitor.call(endOtherSessions);
       const calls = [() => visitor.call(enterWorkshop, { body }), () => visitor.call(signOut)];
       const together = (round % 2 ? calls : calls.toReversed()).map((call) => call().then(({ status }) => status));
       const out = (await Promise.all(together))[round % 2] ?? 0;
       const [row] = await api.platform.database.select<{ count: number }>(left, { accountId: actor.accountId });
       found.push({ out, left: Number(row?.count) });
     }
-    expect(found).toEqual(found.map(() => ({ out: 204, left: 0 })));
+    // A sign-out that came only after the other session had taken its place is refused, and so told apart.
+    const told = found.filter(({ out }) => out === 204);
+    expect(told.length).toBeGreaterThan(0);
+    expect(told.filter(({ left }) => left > 0)).toEqual([]);
+    expect(found.filter(({ out }) => out !== 204 && out !== 401)).toEqual([]);
   });
 
   test('comes with the end of access, which does not touch other workshops', async () => {
