@@ -137,6 +137,8 @@ export const documents = {
   'paper-order-note':
     'Leaves that suffice {percentile} times in a hundred, and {spare_percent} spare leaves of the same batch, in whole booklets and the cheapest packs.',
   'paper-order-none': 'No leaf is laid in this estimate.',
+  'paper-order-samples':
+    'Not counted here: the leaf for {names}. It stands in the estimate as goods bought in; order it with the rest, from the same batch.',
   'paper-order-batch': 'Order each leaf from one batch, and say so: colour and thickness differ from batch to batch.',
   'paper-order-product': 'Leaf',
   'paper-order-metal': 'Metal',

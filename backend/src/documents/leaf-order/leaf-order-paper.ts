@@ -1,4 +1,5 @@
 import type { LeafOrderLine } from '#shared/documents/leaf-order-lines';
+import { chosenDraft } from '#shared/estimates/chosen-draft';
 import type { Snapshot } from '#shared/estimates/snapshot';
 import { currencyDigits } from '#shared/money/currency-digits';
 import { minorOf } from '#shared/money/minor-of';
@@ -55,6 +56,15 @@ function orderTable(pdf: Pdf, lines: readonly LeafOrderLine[], at: { words: Pape
   return tableBlock(pdf, columns, [...kept, total]);
 }
 
+/** Sample boards take leaf that no zone asks for; whoever orders has to know of it. */
+function sampleNotes(pdf: Pdf, { draft, choice }: Snapshot, words: PaperWords): Block[] {
+  const { extras } = chosenDraft(draft, choice).settings;
+  const names = extras.flatMap((extra) => (extra.kind === 'labour' && extra.work === 'sample' ? [extra.name] : []));
+  return names.length === 0
+    ? []
+    : [textBlock(pdf, words.say('paper-order-samples', { names: names.join(', ') }), { before_pt: 10 })];
+}
+
 function orderBlocks(
   pdf: Pdf,
   snapshot: Snapshot,
@@ -84,6 +94,7 @@ function orderBlocks(
     ...(at.lines.length === 0
       ? []
       : [textBlock(pdf, words.say('paper-order-batch'), { before_pt: 10, style: textStyles.medium })]),
+    ...sampleNotes(pdf, snapshot, words),
   ];
 }
 

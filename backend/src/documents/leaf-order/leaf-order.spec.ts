@@ -51,6 +51,20 @@ describe('the leaf order', () => {
     expect(rows[0]).toMatch(new RegExp(`,52,${lines[0].price_minor / 100}$`));
   });
 
+  it('names sample boards, whose leaf no zone asks for', async () => {
+    const board = { id: 'board', name: 'Board of both golds', memberId: null, alternativeId: null } as const;
+    const work = { kind: 'labour', taxCategoryId: 'standard', gradeId: 'gilder', hours: 5, work: 'sample' } as const;
+    const { draft } = snapshot;
+    const settings = { ...draft.settings, extras: [{ ...board, ...work }] };
+    const textOf = async (one: typeof snapshot) => textOfPaper(await leafOrderPaper(one, { lines, logo: null }));
+    expect(await textOf({ ...snapshot, draft: { ...draft, settings } })).toContain(
+      'Not counted here: the leaf for Board of both golds.',
+    );
+    expect(await textOf({ ...snapshot, draft: { ...draft, settings: { ...settings, extras: [] } } })).not.toContain(
+      'Not counted here',
+    );
+  });
+
   it('says so where no leaf is laid', async () => {
     expect(textOfPaper(await leafOrderPaper(snapshot, { lines: [], logo: null }))).toContain('No leaf is laid');
   });
