@@ -102,7 +102,7 @@ export class ClientLines {
     ];
   }
 
-  private taxName({ name, code, percent, net_minor, exemptionReason }: ClientPrice['taxes'][number]): string {
+  private taxName({ name, percent, net_minor, exemptionReason }: ClientPrice['taxes'][number]): string {
     if (Number(percent) === 0) return exemptionReason ? `${name}: ${exemptionReason}` : name;
     return this.words.say('paper-tax', { name, rate_percent: Number(percent), net_minor });
   }
