@@ -4,6 +4,7 @@ import type { AllowanceOrCharge } from '#shared/invoices/invoice-lines';
 import { allowanceAmount } from '#shared/invoices/invoice-totals';
 import { currencyDigits } from '#shared/money/currency-digits';
 import { D, type MinorUnits } from '#shared/money/decimal';
+import { isOutsideTax } from '#shared/money/is-outside-tax';
 import { ratePercent, type TaxRate } from '#shared/money/tax-by-category';
 import type { TaxCode } from '#shared/money/tax-codes';
 import { textStyles, type PaperWords, type TableColumn, type TableRow } from '../../documents';
@@ -13,6 +14,9 @@ export interface InvoiceOnPaper {
   readonly invoice: FrozenInvoice;
   readonly words: PaperWords;
 }
+
+/** Whether there is no tax to speak of at all. */
+const isUntaxed = ({ totals }: FrozenInvoice): boolean => isOutsideTax(totals.categories.map(({ tax }) => tax));
 
 /** A price may have more decimals than its currency; all of them are shown. */
 function priceText({ invoice }: InvoiceOnPaper, price: string): string {
@@ -47,18 +51,20 @@ function lineRow(paper: InvoiceOnPaper, place: number): TableRow {
       { text: line.name, note: note.filter((text) => text.trim() !== '').join('\n'), isRowHead: true },
       { text: quantityText(paper, line.quantity, line.unit) },
       { text: isForOne ? price : words.say('paper-invoice-price-for', { price, quantity }) },
-      { text: taxText(paper, line.tax) },
+      ...(isUntaxed(invoice) ? [] : [{ text: taxText(paper, line.tax) }]),
       { text: words.money(invoice.totals.lineNets_minor[place]) },
     ],
     above: 'hair',
   };
 }
 
-export const invoiceColumns = ({ words }: InvoiceOnPaper): TableColumn[] => [
+export const invoiceColumns = ({ invoice, words }: InvoiceOnPaper): TableColumn[] => [
   { head: words.say('paper-column-work'), width: 'rest' },
   { head: words.say('paper-invoice-column-quantity'), width: 'fit', align: 'right' },
   { head: words.say('paper-invoice-column-unit-price'), width: 'fit', align: 'right' },
-  { head: words.say('paper-invoice-column-tax'), width: 'fit', align: 'right' },
+  ...(isUntaxed(invoice)
+    ? []
+    : [{ head: words.say('paper-invoice-column-tax'), width: 'fit', align: 'right' } as const]),
   { head: words.say('paper-invoice-column-amount'), width: 'fit', align: 'right' },
 ];
 
@@ -72,11 +78,11 @@ interface Sum {
   readonly look?: 'plain' | 'strong' | 'sum';
 }
 
-function sumRow({ text, note, amount, look = 'plain' }: Sum): TableRow {
+function sumRow({ text, note, amount, look = 'plain' }: Sum, columns: number): TableRow {
   const style = { plain: textStyles.body, strong: textStyles.strong, sum: textStyles.sum }[look];
   const above = { plain: 'none', strong: 'hair', sum: 'gold' } as const;
   const cells = [
-    { text, style, span: 4, isRowHead: true, ...(note ? { note } : {}) },
+    { text, style, span: columns - 1, isRowHead: true, ...(note ? { note } : {}) },
     { text: amount, style },
   ];
   return { cells, above: above[look], padding_pt: look === 'plain' ? 1.5 : 4 };
@@ -109,6 +115,22 @@ const taxSums = (paper: InvoiceOnPaper): Sum[] =>
     amount: paper.words.money(tax_minor),
   }));
 
+/** Net, tax and gross; one total, and why, where all of it lies outside the scope of tax. */
+function taxedSums(paper: InvoiceOnPaper): Sum[] {
+  const { invoice, words } = paper;
+  const { net_minor, gross_minor, categories } = invoice.totals;
+  if (isUntaxed(invoice)) {
+    const [reason = ''] = categories.map(({ tax }) => exemptionOf(tax.code, invoice.exemptions)?.reason ?? '');
+    const note = reason || words.say('exemption-o');
+    return [{ text: words.say('paper-total'), note, amount: words.money(gross_minor), look: 'strong' }];
+  }
+  return [
+    { text: words.say('paper-invoice-net'), amount: words.money(net_minor), look: 'strong' },
+    ...taxSums(paper),
+    { text: words.say('paper-invoice-gross'), amount: words.money(gross_minor), look: 'strong' },
+  ];
+}
+
 /** The sums under the lines, in the order in which they are worked. */
 export function sumRows(paper: InvoiceOnPaper): TableRow[] {
   const { invoice, words } = paper;
@@ -124,12 +146,13 @@ export function sumRows(paper: InvoiceOnPaper): TableRow[] {
     ...allowancesCharges.map((one) =>
       single(allowanceText(paper, one), one.charge ? allowanceAmount(one) : -allowanceAmount(one)),
     ),
-    single(words.say('paper-invoice-net'), totals.net_minor, 'strong'),
-    ...taxSums(paper),
-    single(words.say('paper-invoice-gross'), totals.gross_minor, 'strong'),
+    ...taxedSums(paper),
     ...(prepaid_minor === 0 ? [] : [single(words.say('paper-invoice-prepaid'), -prepaid_minor)]),
     ...(rounding_minor === 0 ? [] : [single(words.say('paper-invoice-rounding'), rounding_minor)]),
     single(words.say('paper-invoice-due-sum', { kind }), totals.due_minor, 'sum'),
   ];
-  return sums.map(sumRow).map((row, place) => ({ ...row, keepsWithNext: place < sums.length - 1 }));
+  const columns = invoiceColumns(paper).length;
+  return sums
+    .map((sum) => sumRow(sum, columns))
+    .map((row, place) => ({ ...row, keepsWithNext: place < sums.length - 1 }));
 }

@@ -3,6 +3,7 @@ import { create } from 'xmlbuilder2';
 import type { FrozenInvoice } from '#shared/invoices/invoice';
 import type { InvoiceLine } from '#shared/invoices/invoice-lines';
 import { invoiceTotals } from '#shared/invoices/invoice-totals';
+import { textOfPaper } from '../../../../test/documents/paper-text';
 import { ublInvoice } from '../ubl/ubl-invoice';
 import { invoicePaper } from './invoice-paper';
 
@@ -91,5 +92,23 @@ describe('the paper of an invoice', () => {
     const pdf = (await made({ xml: null })).toString('latin1');
     expect(pdf).not.toContain('EmbeddedFile\n');
     expect(pdf).toContain('pdfaid:part');
+  });
+
+  it('gives one total, and why, where all of it lies outside the scope of tax', async () => {
+    const lines = [{ ...line, tax: { code: 'O', percent: '0' } as const }];
+    const totals = invoiceTotals({ lines, allowancesCharges: [], prepaid_minor: 0, rounding_minor: 0 }, 2);
+    const text = textOfPaper(
+      await invoicePaper({ ...invoice, lines, totals, exemptions: [] }, { logo: null, xml: null }),
+    );
+    expect(text).toContain('Total €2,050.00 Not subject to VAT.');
+    expect(text).not.toMatch(/with tax|without tax|Tax O|VATEX|Tax /);
+    expect(textOfPaper(await made())).toContain('Total without tax');
+  });
+
+  it('bears the numbers it is issued under and no other', async () => {
+    const workshop = { ...invoice.workshop, taxRegistration: 'IE7654321Y' };
+    const text = textOfPaper(await invoicePaper({ ...invoice, workshop }, { logo: null, xml: null }));
+    expect(text).toContain('VAT number IE1234567X');
+    expect(text).not.toContain('IE7654321Y');
   });
 });

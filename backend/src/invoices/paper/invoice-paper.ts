@@ -67,7 +67,7 @@ function accountText({ invoice, words }: InvoiceOnPaper): string {
   return words.say(account.name === '' ? 'paper-invoice-account-nameless' : 'paper-invoice-account', values);
 }
 
-/** The workshop's own numbers stand at the foot; the letterhead bears only what is entered there. */
+/** The numbers an invoice is issued under stand at its foot, and there alone: the letterhead's may be another. */
 function sellerText({ invoice, words }: InvoiceOnPaper): string {
   const { vatId, taxNumber, companyNumber } = invoice.seller;
   const numbers = [
@@ -107,7 +107,11 @@ function invoiceBlocks(pdf: Pdf, paper: InvoiceOnPaper, parts: InvoicePaperParts
   const title = words.say('paper-invoice-title', { kind: invoice.kind, number: invoice.number });
   const note = invoice.note.trim() === '' ? [] : [textBlock(pdf, invoice.note, { before_pt: 6 })];
   return [
-    letterheadBlock({ workshop: invoice.workshop, logo: printableLogo(pdf, parts.logo), words }),
+    letterheadBlock({
+      workshop: { ...invoice.workshop, taxRegistration: '' },
+      logo: printableLogo(pdf, parts.logo),
+      words,
+    }),
     addressOf(pdf, paper),
     textBlock(pdf, title, { style: textStyles.title, tag: 'H1' }),
     ...note,
