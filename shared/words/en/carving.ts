@@ -42,5 +42,5 @@ export const carving = {
   'carving-wood-dust':
     'Wood dust, of soft and hard timber alike, is known to cause cancer (IARC Group 1). Extract it at the source and wear a mask. Follow local codes and the product’s safety data sheet; ask a licensed professional.',
   'carving-run-taken': 'The mitre leaves and the centrepiece are longer than the run.',
-  'carving-stages-not-whole': 'The shares of the stages must come to exactly 100 %.',
+  'carving-stages-not-whole': 'The shares of the stages must come to exactly 100%.',
 } as const;

@@ -1,11 +1,11 @@
 export const estimates = {
-  'zone-shares-over': 'The shares of this member come to more than 100 %.',
+  'zone-shares-over': 'The shares of this member come to more than 100%.',
   'zone-leaf-missing': 'Choose the leaf that is laid on {zone}.',
   'stages-withhold-too-much': 'Deposit and retention together cannot be more than the contract.',
   'estimate-too-large':
     'Together these figures become too large to be worked out. Look at the counts and sizes that were changed last.',
   'effect-too-large': 'On the new card the figures of this estimate become too large to be worked out.',
-  'stages-not-whole': 'The stages must come to 100 % together.',
+  'stages-not-whole': 'The stages must come to 100% together.',
   'piece-unknown': 'Choose a piece of this estimate.',
   'piece-has-members': '{piece} still has members; move or remove them first.',
   'issue-draft-changed': 'The estimate was changed since you last saw it. Look at it once more before issuing.',

@@ -47,7 +47,7 @@ export const measure = {
   'measure-opening-too-long': 'This opening is {opening_mm} long and does not fit into the face.',
   'measure-opening-too-wide':
     'This opening is {opening_mm} across where it is narrowest, and the face only {room_mm}.',
-  'measure-shares-over': 'The zones of this member take {taken_percent} together. They can take 100 % at most.',
+  'measure-shares-over': 'The zones of this member take {taken_percent} together. They can take 100% at most.',
   'measure-parts-none': 'This zone takes parts of the girth, but none is chosen. Choose parts, or give it a share.',
   'measure-part-unknown': 'This zone takes a part of the girth that the profile no longer has.',
   'measure-part-twice': 'Two zones take the same part of the girth.',

@@ -25,7 +25,7 @@ const groups: readonly Group[] = [
   },
   { heading: $localize`Time`, fields: ['gradeId', 'work.way', 'work.hours_m2', 'work.factors', 'work.part'] },
   {
-    heading: $localize`Drying, at 20 °C and 50 % relative humidity`,
+    heading: $localize`Drying, at 20 °C and 50% relative humidity`,
     fields: [
       ...['drying.model', 'drying.betweenCoats_minutes.low', 'drying.betweenCoats_minutes.likely'],
       ...['drying.betweenCoats_minutes.high', 'drying.latestCoat_minutes', 'drying.wholeWithin_minutes'],
