@@ -66,10 +66,24 @@ export function lockFolder(folder, port) {
   return () => rmSync(file, { force: true });
 }
 
+function readSecrets(file) {
+  try {
+    return JSON.parse(readFileSync(file, 'utf8'));
+  } catch {
+    throw new Error(
+      `${file} cannot be read as what it was: put it back from a copy, or move the whole folder away to begin anew.`,
+    );
+  }
+}
+
 /** The secrets of this installation, made at the first start and readable by its user alone. */
 export function secretsOf(folder) {
   const file = join(folder, 'secrets.json');
-  if (existsSync(file)) return JSON.parse(readFileSync(file, 'utf8'));
+  if (existsSync(file)) return readSecrets(file);
+  if (existsSync(join(folder, 'database')))
+    throw new Error(
+      `${file} is missing, and the database beside it opens to nothing else. Put it back from a copy, or move the whole folder away to begin anew.`,
+    );
   const made = {
     databaseRoot: secret(),
     databaseMigration: secret(),
@@ -77,7 +91,7 @@ export function secretsOf(folder) {
     session: secret(),
     demonstration: phrase(),
   };
-  writeFileSync(`${file}.making`, JSON.stringify(made, null, 2), { mode: 0o600 });
+  writeFileSync(`${file}.making`, JSON.stringify(made, null, 2), { mode: 0o600, flush: true });
   renameSync(`${file}.making`, file);
   return made;
 }

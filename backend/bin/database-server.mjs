@@ -101,7 +101,7 @@ export async function startDatabase({ folder, port, isThrowAway = false }) {
   });
   child.on('error', () => undefined);
   const stop = async () => {
-    if (child.exitCode === null && child.pid) await endProcess(child.pid);
+    if (child.exitCode === null && child.signalCode === null && child.pid) await endProcess(child.pid);
     rmSync(socketFolder, { recursive: true, force: true });
   };
   if (!(await waitForGreeting(port ? { port, host: '127.0.0.1' } : { path: socket }, child))) {

@@ -21,6 +21,7 @@ export function pidIn(file, mention) {
 /** Asks a process to end and waits until it has; false if it does not within the given time. */
 export async function endProcess(pid, wait_milliseconds = 20_000) {
   const until = Date.now() + wait_milliseconds;
+  if (!commandOf(pid)) return true;
   process.kill(pid, 'SIGTERM');
   while (commandOf(pid) && Date.now() < until) await pause(50);
   return !commandOf(pid);

@@ -108,6 +108,22 @@ describe('a mailed link', () => {
     expect((await person.visitor.request('get', '/api/people')).status).toBe(401);
   });
 
+  test('ends with any other that is waiting once a password was set, by a link or by its owner', async () => {
+    const person = await bench();
+    const [first, second, third] = [
+      await linkFor(person.email),
+      await linkFor(person.email),
+      await linkFor(person.email),
+    ];
+    expect((await use(second)).status).toBe(204);
+    expect([(await use(first)).status, (await use(third)).status]).toEqual([410, 410]);
+    const other = await bench();
+    const waiting = await linkFor(other.email);
+    const body = { current: password, password: 'nine slow otters swim' };
+    expect((await other.visitor.call(changePassword, { body })).status).toBe(204);
+    expect((await use(waiting)).status).toBe(410);
+  });
+
   test('is of no use after ten minutes, nor when made up', async () => {
     const { email } = await bench();
     const token = await linkFor(email);

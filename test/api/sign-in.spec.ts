@@ -49,6 +49,19 @@ test('the waits double, and the right password after a wait clears them', async 
   expect((await visitor.signIn(email, 'a wrong one once more')).status).toBe(403);
 });
 
+test('an address spelled otherwise is the same address, to the door and to its throttle', async () => {
+  const email = await known();
+  const guesser = await somewhere();
+  const spelled = (guess: number) =>
+    `${' '.repeat(guess % 3)}${guess % 2 ? email.toUpperCase() : email}${' '.repeat(guess)}`;
+  expect((await guesser.signIn(spelled(3), password)).status).toBe(200);
+  const stranger = await somewhere();
+  const statuses: number[] = [];
+  for (let guess = 0; guess < 10; guess++)
+    statuses.push((await stranger.signIn(spelled(guess), 'a wrong one every time')).status);
+  expect(statuses).toEqual([...Array<number>(5).fill(403), ...Array<number>(5).fill(429)]);
+});
+
 test('many at once are no way around', async () => {
   const email = await known();
   const visitor = await somewhere();

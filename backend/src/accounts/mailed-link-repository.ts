@@ -26,6 +26,10 @@ export class MailedLinkRepository {
     return (await this.table.findOne({ where: { tokenHash }, raw: true })) as unknown as MailedLinkRow;
   }
 
+  async end(purpose: LinkPurpose, about: string, now: Date): Promise<void> {
+    await this.table.update({ usedAt: now }, { where: { purpose, about, usedAt: null } });
+  }
+
   sweep(before: Date): Promise<number> {
     return this.table.destroy({ where: { endsAt: { [Op.lt]: before } } });
   }

@@ -45,6 +45,11 @@ export class MailedLinks {
     return link.content as Content;
   }
 
+  /** Ends those nobody has used yet. */
+  end(purpose: LinkPurpose, about: string): Promise<void> {
+    return this.rows.end(purpose, about, this.clock.now());
+  }
+
   sweep(): Promise<number> {
     return this.rows.sweep(later(this.clock.now(), -7 * 24 * 60));
   }

@@ -62,6 +62,7 @@ export class PasswordService {
     refuseWeakPassword(password, [person.email, person.name, ...memberships.map(({ workshopName }) => workshopName)]);
     await this.parts.accounts.setPassword(person.accountId, await hashPassword(password));
     await this.parts.sessions.endOthers(person.accountId);
+    await this.parts.links.end('reset', person.email);
     this.parts.log.info({ accountId: person.accountId }, 'password changed, sessions ended');
   }
 

@@ -25,8 +25,8 @@ export const sessionRoutes = ({ identities, sessions, clock }: Parts): Route[] =
     const identity = person && { accountId: person.accountId, ...(actor ? { membershipId: actor.membershipId } : {}) };
     return presentSession(session.forgeryToken, identity && (await identities.facts(identity)));
   }),
-  mount(signIn, async ({ session }) => {
-    const identity = await session.signInByPassword();
+  mount(signIn, async ({ session, body }) => {
+    const identity = await session.signInByPassword(body);
     if (!identity) throw new Rejection('not-allowed', 'sign-in-refused');
     return presentSession(session.forgeryToken, await identities.facts(identity));
   }),

@@ -28,7 +28,10 @@ function parametersOf(endpoint: Endpoint): Json[] {
   return [
     ...fields(endpoint.params, 'path'),
     ...fields(endpoint.query, 'query'),
-    ...(endpoint.method === 'get' ? [] : [header('X-CSRF-Token', 'The token of GET /api/session.')]),
+    ...(endpoint.method === 'get' || endpoint.signature
+      ? []
+      : [header('X-CSRF-Token', 'The token of GET /api/session.')]),
+    ...(endpoint.signature ? [header(endpoint.signature, 'The signature of the body by whoever sends it.')] : []),
     ...(endpoint.versioned ? [header('If-Match', 'The version seen, as the ETag gave it.')] : []),
     ...(endpoint.idempotent ? [header('Idempotency-Key', 'A random key of 16 to 80 characters; kept for a day.')] : []),
   ];

@@ -1,5 +1,9 @@
+import { setTimeout as pause } from 'node:timers/promises';
 import type { RequestHandler } from 'express';
 import type { Database } from '../database/database';
+
+/** A database that is frozen gives no answer at all. */
+const patience_milliseconds = 3000;
 
 /** Whether the server takes requests: it stops saying so a moment before it stops. */
 export class Readiness {
@@ -16,12 +20,12 @@ export class Readiness {
 
   /** 200 while requests are welcome and the database answers, else 503. */
   readonly ready: RequestHandler = async (_request, response) => {
-    const answers =
-      !this.stopping &&
-      (await this.database.select('SELECT 1 AS one').then(
-        () => true,
-        () => false,
-      ));
+    const answered = this.database.select('SELECT 1 AS one').then(
+      () => true,
+      () => false,
+    );
+    const tooLate = pause(patience_milliseconds, false, { ref: false });
+    const answers = !this.stopping && (await Promise.race([answered, tooLate]));
     response.status(answers ? 200 : 503).json({ ready: answers });
   };
 

@@ -7,7 +7,15 @@ import { Rejection } from '#shared/problems/rejection';
 import type { Config } from '../config/config';
 import { newSessionId } from '../session/new-session-id';
 import { markUnattended, type SessionStore } from '../session/session-store';
-import type { Identities, Identity, SessionControl, SignedIn, Visit, Visits } from '../session/session-control';
+import type {
+  Credentials,
+  Identities,
+  Identity,
+  SessionControl,
+  SignedIn,
+  Visit,
+  Visits,
+} from '../session/session-control';
 
 /** Requests that a page sends on its own, such as polling, carry this header and do not prolong a session. */
 export const unattendedHeader = 'x-unattended';
@@ -102,7 +110,7 @@ export class Sessions {
       signIn,
       enter: (identity) => this.enter(request, identity),
       beginVisit: (visit) => this.beginVisit(request, visit),
-      signInByPassword: () => this.byPassword(request, signIn),
+      signInByPassword: (entered) => this.byPassword(request, entered),
       signOut: () => this.signOut(request),
     };
   }
@@ -167,12 +175,14 @@ export class Sessions {
     await this.store.endOfHandle(handle);
   }
 
-  private byPassword(request: Request, signIn: (identity: Identity) => Promise<void>): Promise<Identity | undefined> {
+  /** What passport reads is what the schema made of the body: one account has one spelling, which its throttle counts. */
+  private byPassword(request: Request, entered: Credentials): Promise<Identity | undefined> {
+    request.body = entered;
     return new Promise((resolve, reject) => {
       const decide = (error: Error | null, identity: Identity | false): void => {
         if (error) return reject(error);
         if (!identity) return resolve(undefined);
-        signIn(identity).then(() => resolve(identity), reject);
+        this.signIn(request, identity).then(() => resolve(identity), reject);
       };
       const strategy = this.passport.authenticate('local', decide) as RequestHandler;
       void strategy(request, request.res!, reject);

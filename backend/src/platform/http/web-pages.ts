@@ -6,7 +6,7 @@ import { pagePolicy } from './headers';
 import { smallerFiles } from './smaller-files';
 
 const year_seconds = 31_536_000;
-const hashed = /[-.][A-Za-z0-9_-]{8,}\.(?:js|css|woff2|png|svg)$/;
+const hashed = /[-.][A-Z0-9]{8}\.(?:js|css|woff2|png|svg)$/;
 
 /** Clients have an application of their own, so that nothing of the workshop's travels with theirs. */
 function entryOf(folder: string, path: string): string {

@@ -42,14 +42,20 @@ export interface Visits {
   load(visit: Visit): Promise<ClientActor | undefined>;
 }
 
+/** What somebody signs in with. */
+export interface Credentials {
+  readonly email: string;
+  readonly password: string;
+}
+
 /** What a handler may do with the session of its request. */
 export interface SessionControl {
   /** The public handle of this session, undefined until somebody signed in. */
   readonly id: string | undefined;
   /** The token that unsafe requests of this session carry. */
   readonly forgeryToken: string;
-  /** Checks the e-mail and password in the body and signs in under a new session id; answers nobody when they do not fit. */
-  signInByPassword(): Promise<Identity | undefined>;
+  /** Checks e-mail and password, read by their schema, and signs in under a new session id; answers nobody when they do not fit. */
+  signInByPassword(entered: Credentials): Promise<Identity | undefined>;
   /** Signs in under a new session id; its time begins anew. */
   signIn(identity: Identity): Promise<void>;
   /** Goes on in another workshop under a new session id; its time goes on too. */

@@ -16,5 +16,7 @@ declare module 'express-session' {
     seenAt: number;
     /** Set for a request that nobody's hand made (polling): it does not prolong the session. */
     unattended: boolean;
+    /** Set once it was written, in this request. */
+    isWritten: boolean;
   }
 }

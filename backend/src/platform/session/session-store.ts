@@ -27,6 +27,15 @@ const settle = (work: Promise<unknown>, done: Done = () => undefined): void => v
 export const markUnattended = (session: object): object =>
   Object.defineProperty(session, 'unattended', { value: true, enumerable: false });
 
+/** Not written down with the session, so that it does not look changed by it. */
+const markWritten = (session: object): object =>
+  Object.defineProperty(session, 'isWritten', { value: true, enumerable: false, configurable: true });
+
+const beginning = `INSERT INTO sessions (id_hash, id, account_id, membership_id, content, created_at, seen_at)
+  VALUES (:hash, :handle, :accountId, :membershipId, :content, :begun, :now)`;
+const changing = `UPDATE sessions SET account_id = :accountId, membership_id = :membershipId, content = :content
+  WHERE id_hash = :hash`;
+
 /** Sessions in the database: only the SHA-256 of an id is kept, and both ends of a session are checked when it is read. */
 export class SessionStore extends Store {
   constructor(
@@ -88,23 +97,20 @@ export class SessionStore extends Store {
     return row ? { ...row.content, begunAt: row.createdAt.getTime(), seenAt: row.seenAt.getTime() } : null;
   }
 
+  /** A session that was written or read before is only changed: one that has ended meanwhile does not come back. */
   private async write(id: string, session: SessionData): Promise<void> {
     const user = session.passport?.user;
     const now = this.clock.now();
-    await this.database.execute(
-      `INSERT INTO sessions (id_hash, id, account_id, membership_id, content, created_at, seen_at)
-       VALUES (:hash, :handle, :accountId, :membershipId, :content, :begun, :now)
-       ON DUPLICATE KEY UPDATE account_id = VALUES(account_id), membership_id = VALUES(membership_id), content = VALUES(content)`,
-      {
-        hash: hashOf(id),
-        handle: session.handle,
-        accountId: user?.accountId ?? null,
-        membershipId: user?.membershipId ?? null,
-        content: JSON.stringify(session),
-        begun: new Date(session.begunAt ?? now),
-        now,
-      },
-    );
+    const isKnown = session.seenAt !== undefined || session.isWritten === true;
+    await this.database.execute(isKnown ? changing : beginning, {
+      hash: hashOf(id),
+      handle: session.handle,
+      accountId: user?.accountId ?? null,
+      membershipId: user?.membershipId ?? null,
+      content: JSON.stringify(session),
+      ...(isKnown ? {} : { begun: new Date(session.begunAt ?? now), now }),
+    });
+    markWritten(session);
   }
 
   private mark(id: string): Promise<number> {
