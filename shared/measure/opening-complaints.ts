@@ -39,8 +39,10 @@ function misfit(faces: readonly FlatSpan[], opening: Opening, index: number): Co
   if (!span || faces.length === 0 || faces.some((face) => hasRoom(face, span))) return [];
   const path = beside(opening, index);
   const longEnough = faces.filter(({ longest_mm }) => isAtMost(span.longest_mm, longest_mm));
-  if (longEnough.length === 0)
-    return [{ path, code: 'measure-opening-too-long', values: { opening_mm: span.longest_mm } }];
+  if (longEnough.length === 0) {
+    const face_mm = Math.max(...faces.map(({ longest_mm }) => longest_mm));
+    return [{ path, code: 'measure-opening-too-long', values: { opening_mm: span.longest_mm, face_mm } }];
+  }
   const room_mm = Math.max(...longEnough.map(({ width_mm }) => width_mm));
   return [{ path, code: 'measure-opening-too-wide', values: { opening_mm: span.width_mm, room_mm } }];
 }

@@ -35,9 +35,9 @@ export const startMoney: MoneyCard = {
     {
       ...taxed,
       id: 'outside-scope',
-      name: 'Outside the scope of VAT',
+      name: 'Outside the scope of tax',
       code: 'O',
-      exemptionReason: 'Not subject to VAT',
+      exemptionReason: 'Not subject to tax',
     },
   ],
   defaultTaxCategoryId: 'standard',

@@ -201,7 +201,7 @@ describe('the estimate as a paper', () => {
     expect(taxed).toMatch(/\bNet €[\d,.]+ .*\bTotal €/);
     expect(outside).not.toMatch(/\bNet €/);
     expect(outside).not.toContain('€0.00');
-    expect(outside).toMatch(/\bTotal €[\d,.]+ Not subject to VAT|\bTotal Not subject to VAT €/);
+    expect(outside).toMatch(/\bTotal €[\d,.]+ Not subject to tax|\bTotal Not subject to tax €/);
   });
 
   it.each(['members', 'kinds'] as const)('comes by %s to sections that sum to the lines', async (presentation) => {

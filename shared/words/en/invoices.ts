@@ -163,7 +163,7 @@ export const invoices = {
   'exemption-ae': 'Reverse charge: the tax is owed by the recipient.',
   'exemption-k': 'Supply within the Union, free of tax.',
   'exemption-g': 'Export outside the Union, free of tax.',
-  'exemption-o': 'Not subject to VAT.',
+  'exemption-o': 'Not subject to tax.',
   'exemption-e': 'Exempt from VAT.',
   'paper-statement': 'Statement',
   'paper-statement-title': 'Statement for {client}, {from} to {to}',

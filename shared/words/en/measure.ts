@@ -44,9 +44,9 @@ export const measure = {
   // What a member's areas have to tell
   'measure-openings-too-large':
     'The openings take {openings_mm2}, more than the {area_mm2} there is. Make them smaller, or fewer.',
-  'measure-opening-too-long': 'This opening is {opening_mm} long and does not fit into the face.',
-  'measure-opening-too-wide':
-    'This opening is {opening_mm} across where it is narrowest, and the face only {room_mm}.',
+  'measure-opening-too-long':
+    'This opening reaches {opening_mm} from end to end, corner to corner, and the face only {face_mm}.',
+  'measure-opening-too-wide': 'This opening is {opening_mm} across where it is narrowest, and the face only {room_mm}.',
   'measure-shares-over': 'The zones of this member take {taken_percent} together. They can take 100% at most.',
   'measure-parts-none': 'This zone takes parts of the girth, but none is chosen. Choose parts, or give it a share.',
   'measure-part-unknown': 'This zone takes a part of the girth that the profile no longer has.',

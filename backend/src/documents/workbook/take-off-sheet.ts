@@ -76,7 +76,7 @@ function memberTable(sheet: Sheet, facts: WorkbookFacts): Map<string, number> {
   return new Map(members.map((measured) => [measured.member.id, memberRow(sheet, measured, facts)]));
 }
 
-function totalRow(sheet: Sheet, label: string, from: number): void {
+function totalRow(sheet: Sheet, label: string, { from, last }: { from: number; last: number }): void {
   const to = sheet.rows.length;
   const figure = (cells: readonly CellContent[], column: number) => {
     const cell = cells[column - 1];
@@ -86,7 +86,8 @@ function totalRow(sheet: Sheet, label: string, from: number): void {
     sheet.rows.slice(from - 1, to).reduce((sum, { cells }) => sum + figure(cells, column), 0);
   const sum = (column: number) =>
     to < from ? null : formula(`SUM(${sheet.here(column, from)}:${sheet.here(column, to)})`, total(column));
-  sheet.add([null, label, null, null, null, null, null, sum(at.plan), sum(at.true)], 'sum');
+  const sums = [sum(at.plan), sum(at.true)].slice(0, last - at.plan + 1);
+  sheet.add([null, label, null, null, null, null, null, ...sums], 'sum');
 }
 
 function zoneHeads({ say }: WorkbookFacts['words']): string[] {
@@ -114,7 +115,7 @@ export function takeOffSheet(facts: WorkbookFacts, rates: GildingRates): TakeOff
   sheet.head(words.say('sheet-take-off'), words.say('sheet-take-off-note'), memberHeads(words));
   const first = sheet.next;
   const memberRows = memberTable(sheet, facts);
-  totalRow(sheet, words.say('sheet-total'), first);
+  totalRow(sheet, words.say('sheet-total'), { from: first, last: at.plan });
   sheet.add([]);
   sheet.add(zoneHeads(words), 'head');
   const from = sheet.next;
@@ -129,7 +130,7 @@ export function takeOffSheet(facts: WorkbookFacts, rates: GildingRates): TakeOff
       addresses[key].set(zone.zone.id, sheet.at(own[key], row));
   }
   const to = sheet.rows.length;
-  totalRow(sheet, words.say('sheet-total'), from);
+  totalRow(sheet, words.say('sheet-total'), { from, last: at.true });
   const spans = { plan: sheet.span(at.plan, from, to), lot: sheet.span(own.lot, from, to) };
   return { sheet, ...addresses, lotPlan: (lot) => `SUMIFS(${spans.plan},${spans.lot},${lot})` };
 }

@@ -100,7 +100,7 @@ describe('the paper of an invoice', () => {
     const text = textOfPaper(
       await invoicePaper({ ...invoice, lines, totals, exemptions: [] }, { logo: null, xml: null }),
     );
-    expect(text).toContain('Total €2,050.00 Not subject to VAT.');
+    expect(text).toContain('Total €2,050.00 Not subject to tax.');
     expect(text).not.toMatch(/with tax|without tax|Tax O|VATEX|Tax /);
     expect(textOfPaper(await made())).toContain('Total without tax');
   });

@@ -1,10 +1,13 @@
 import { ChangeDetectionStrategy, Component, computed, inject, resource, signal } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { Router, RouterLink } from '@angular/router';
+import type { TaxCode } from '#shared/money/tax-codes';
 import type { Finding } from '#shared/words/finding';
 import { letterFindings } from '#shared/words/letter-findings';
 import { Formats } from '../../core/formats/formats';
+import { taxCodeNames } from '../../core/formats/tax-code-names';
 import { Notices } from '../../core/problems/notices';
+import { Session } from '../../core/session/session';
 import { Entry } from '../../ui/field/entry';
 import { Field } from '../../ui/field/field';
 import { FormComplaint } from '../../ui/field/form-complaint';
@@ -33,6 +36,7 @@ const named = 4;
 })
 export class IssueBox {
   private readonly router = inject(Router);
+  private readonly session = inject(Session);
   private readonly formats = inject(Formats);
   private readonly notices = inject(Notices);
   protected readonly store = inject(EstimateStore);
@@ -67,6 +71,13 @@ export class IssueBox {
   protected readonly acceptedLetter = computed(
     () => this.store.issues().find(({ state }) => state === 'accepted')?.letter,
   );
+  /** The workshop's usual tax, where no part of the price is under it. */
+  protected readonly usualTax = computed(() => {
+    const usual = this.session.workshop()?.defaultTaxCategory as TaxCode | undefined;
+    const taxes = this.store.priced()?.price.taxes ?? [];
+    const isElsewhere = usual && taxes.length > 0 && taxes.every(({ tax }) => tax.code !== usual);
+    return isElsewhere ? taxCodeNames[usual] : '';
+  });
   protected readonly jobRoute = computed(() => ['/jobs', this.store.ids()?.jobId ?? '']);
   protected readonly isTaxed = computed(() => (this.store.priced()?.price.tax_minor ?? 0) !== 0);
   protected readonly gross = computed(() => this.formats.money(this.store.priced()?.price.gross_minor ?? 0));

@@ -211,6 +211,10 @@ describe('The pages of issues', () => {
       await open(IssuePage);
       const sums = [...element().querySelectorAll('app-paper-preview app-price-sums dt')].map(spoken);
       expect(sums).toEqual(['Total']);
+      expect(spoken(element().querySelector('app-paper-preview .untaxed'))).toBe('Not subject to tax');
+      expect(spoken(element().querySelector('app-issue-box'))).toContain(
+        'Nothing here is taxed as the workshop usually is',
+      );
     });
 
     it('hears at once of a card that has just come into force, before it says that nothing stops it', async () => {

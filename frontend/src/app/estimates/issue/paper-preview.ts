@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { scopeTexts } from '#shared/estimates/scope-texts';
+import { reasonOutsideTax } from '#shared/money/is-outside-tax';
 import { Formats } from '../../core/formats/formats';
 import { Words } from '../../core/formats/words';
 import { EstimateStore } from '../estimate-store';
@@ -52,6 +53,15 @@ export class PaperPreview {
       })),
   );
   protected readonly taxName = computed(() => this.names.taxOf(this.store.card()?.money.taxCategories));
+  /** Why nothing is taxed at all, as far as the reader knows the card. */
+  protected readonly untaxed = computed(() => {
+    const categories = this.store.card()?.money.taxCategories ?? [];
+    const reasonOf = (id: string) => categories.find((one) => one.id === id)?.exemptionReason ?? '';
+    const taxes = this.store.priced()?.price.taxes ?? [];
+    return reasonOutsideTax(
+      taxes.map(({ tax, taxCategoryId }) => ({ code: tax.code, exemptionReason: reasonOf(taxCategoryId) })),
+    );
+  });
   private readonly scope = computed(() => {
     const [draft, choice, lines] = [this.store.draft(), this.store.choice(), this.store.priced()?.price.lines];
     if (!draft || !lines) return { included: '', excluded: '' };

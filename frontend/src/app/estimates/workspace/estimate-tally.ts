@@ -55,12 +55,14 @@ export class EstimateTally {
         name: $localize`Carve`,
         figure: $localize`${this.formats.number(tally.carving_hours.likely, 1, 1)}:hours: h`,
         minor: this.spread(tally.carving_hours),
+        minorName: $localize`at least and at most`,
         route: this.route('carve'),
       },
       {
         name: $localize`Gild`,
         figure: this.formats.figure('booklets', tally.booklets),
         minor: this.between(tally.booklets_p10, tally.booklets_p90),
+        minorName: $localize`eight times in ten`,
         route: this.route('gild'),
       },
       {

@@ -1,10 +1,12 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import type { BuildUpStep } from '#shared/buildups/buildup';
+import { referenceClimate } from '#shared/drying/climate';
 import type { CardColumn } from '#shared/rate-cards/tables/card-table';
 import { fieldsOf, type CellPath } from '#shared/rate-cards/tables/cell-path';
 import { lagColumns, stepColumns, useColumns } from '#shared/rate-cards/tables/step-columns';
 import { valueAt } from '#shared/rate-cards/tables/value-at';
+import { Formats } from '../../core/formats/formats';
 import { FormComplaint } from '../../ui/field/form-complaint';
 import { CardStore } from '../card/card-store';
 import { CardEntry } from '../cells/card-entry';
@@ -25,7 +27,7 @@ const groups: readonly Group[] = [
   },
   { heading: $localize`Time`, fields: ['gradeId', 'work.way', 'work.hours_m2', 'work.factors', 'work.part'] },
   {
-    heading: $localize`Drying, at 20 °C and 50% relative humidity`,
+    heading: $localize`Drying`,
     fields: [
       ...['drying.model', 'drying.betweenCoats_minutes.low', 'drying.betweenCoats_minutes.likely'],
       ...['drying.betweenCoats_minutes.high', 'drying.latestCoat_minutes', 'drying.wholeWithin_minutes'],
@@ -49,6 +51,7 @@ const columnsOf = (fields: readonly string[]): CardColumn[] =>
 })
 export class StepEditor {
   private readonly store = inject(CardStore);
+  private readonly formats = inject(Formats);
 
   /** The way to the step, and to the same one in the card the draft was copied from. */
   readonly path = input.required<CellPath>();
@@ -56,9 +59,15 @@ export class StepEditor {
 
   protected readonly isEditable = this.store.isEditable;
   private readonly step = computed(() => valueAt(this.store.content(), this.path()) as BuildUpStep | undefined);
+  /** Times of drying are those of one air; another scales them. */
+  private readonly dryingHeading = computed(() => {
+    const temperature = this.formats.figure('celsius', referenceClimate.temperature_celsius);
+    const humidity = this.formats.figure('percent', referenceClimate.humidity_percent);
+    return $localize`Drying, at ${temperature}:temperature: and ${humidity}:humidity: relative humidity`;
+  });
   protected readonly groups = computed(() =>
     groups.map(({ heading, fields }) => ({
-      heading,
+      heading: fields.includes('drying.model') ? this.dryingHeading() : heading,
       entries: this.entries(columnsOf(fields), this.path(), this.modelPath()),
     })),
   );

@@ -5,6 +5,8 @@ export interface TallyCell {
   readonly name: string;
   readonly figure: string;
   readonly minor?: string;
+  /** What the minor figure is, where the figure alone does not say it. */
+  readonly minorName?: string;
   readonly route: string | readonly unknown[] | UrlTree;
   /** Still being worked out. */
   readonly isPending?: boolean;
