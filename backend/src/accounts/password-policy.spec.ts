@@ -55,6 +55,8 @@ test.each([
   'harbourlanecarvers2026',
   'jonah.pikesley is here',
   'I am Jonah Pikesley',
+  'Carvers of Harbour Lane',
+  'HarbourCarvers 2026',
 ])('“%s” speaks of product, workshop or person', (password) => {
   expect(refusal(password)).toBe('password-about-you');
 });

@@ -81,6 +81,14 @@ const aboutOf = (context: readonly string[]): string[] =>
     .map(plain)
     .filter((word) => word.length >= 4);
 
+/** Whether little is left once each word of the workshop's and the person's name is taken out. */
+function isMadeOfNames(text: string, context: readonly string[]): boolean {
+  const words = context.flatMap((one) => one.split(/[^\p{L}\p{N}]+/u)).map(plain);
+  const long = words.filter((word) => word.length >= 4).sort((one, other) => other.length - one.length);
+  const rest = long.reduce((left, word) => left.replaceAll(word, ''), text);
+  return rest !== text && rest.length < enoughOfOnesOwn;
+}
+
 function complaint(code: WordCode, values: WordValues = {}): Rejection {
   const complaints: Complaint[] = [{ path: ['password'], code, values }];
   return new Rejection('invalid', 'problem-invalid', { complaints });
@@ -89,6 +97,7 @@ function complaint(code: WordCode, values: WordValues = {}): Rejection {
 /** Refuses a new password that is common or speaks of the product, the workshop or the person (NIST SP 800-63B-4, block lists). */
 export function refuseWeakPassword(password: string, context: readonly string[]): void {
   const text = plain(password);
-  if (aboutOf(context).some((word) => text.includes(word))) throw complaint('password-about-you');
+  if (aboutOf(context).some((word) => text.includes(word)) || isMadeOfNames(text, context))
+    throw complaint('password-about-you');
   if (isCommon(password)) throw complaint('password-common');
 }
