@@ -80,7 +80,7 @@ function readSecrets(file) {
 export function secretsOf(folder) {
   const file = join(folder, 'secrets.json');
   if (existsSync(file)) return readSecrets(file);
-  if (existsSync(join(folder, 'database')))
+  if (existsSync(join(folder, 'database/ibdata1')))
     throw new Error(
       `${file} is missing, and the database beside it opens to nothing else. Put it back from a copy, or move the whole folder away to begin anew.`,
     );

@@ -176,6 +176,24 @@ describe('the first start', () => {
   );
 });
 
+test.each([
+  ['are not whole', '{', 'cannot be read as what it was'],
+  ['are missing beside their database', undefined, 'is missing, and the database beside it opens to nothing else'],
+])(
+  'secrets that %s are told of, and no others made in their place',
+  async (how, content, sentence) => {
+    const without = join(folder, how.replaceAll(' ', '-'));
+    await mkdir(join(without, 'database'), { recursive: true });
+    await writeFile(join(without, 'database/ibdata1'), 'left');
+    if (content !== undefined) await writeFile(join(without, 'secrets.json'), content);
+    const attempt = start({ DATA_DIR: without });
+    expect(await attempt.ended).toBe(1);
+    expect(attempt.text()).toContain(sentence);
+    expect(existsSync(join(without, 'secrets.json'))).toBe(content !== undefined);
+  },
+  120_000,
+);
+
 test('a folder that holds half a database is left alone, with a sentence', async () => {
   const half = join(folder, 'half');
   await mkdir(join(half, 'database'), { recursive: true });
