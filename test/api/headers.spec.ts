@@ -117,7 +117,9 @@ test('a text of the pages comes by brotli where it was made smaller and can be r
 
 test('a file under a hashed name is kept for ever, the page and the API never', async () => {
   expect((await get('/main-ABCDEFGH.js')).headers['cache-control']).toBe('public, max-age=31536000, immutable');
-  writeFileSync(join(api.platform.config.webFolder, 'small-sans-400.woff2'), '');
+  const files = ['chunk-b0wn1ke0.js', 'small-sans-400.woff2'];
+  for (const file of files) writeFileSync(join(api.platform.config.webFolder, file), '');
+  expect((await get('/chunk-b0wn1ke0.js')).headers['cache-control']).toBe('public, max-age=31536000, immutable');
   expect((await get('/small-sans-400.woff2')).headers['cache-control']).toBe('no-cache');
   expect((await get('/mark.svg')).headers['cache-control']).toBe('no-cache');
   expect((await get('/')).headers['cache-control']).toBe('no-store');

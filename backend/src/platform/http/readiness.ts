@@ -20,12 +20,7 @@ export class Readiness {
 
   /** 200 while requests are welcome and the database answers, else 503. */
   readonly ready: RequestHandler = async (_request, response) => {
-    const answered = this.database.select('SELECT 1 AS one').then(
-      () => true,
-      () => false,
-    );
-    const tooLate = pause(patience_milliseconds, false, { ref: false });
-    const answers = !this.stopping && (await Promise.race([answered, tooLate]));
+    const answers = !this.stopping && (await this.databaseAnswers());
     response.status(answers ? 200 : 503).json({ ready: answers });
   };
 
@@ -34,4 +29,12 @@ export class Readiness {
     if (this.stopping) response.set('Connection', 'close');
     next();
   };
+
+  private databaseAnswers(): Promise<boolean> {
+    const answered = this.database.select('SELECT 1 AS one').then(
+      () => true,
+      () => false,
+    );
+    return Promise.race([answered, pause(patience_milliseconds, false, { ref: false })]);
+  }
 }

@@ -6,7 +6,8 @@ import { pagePolicy } from './headers';
 import { smallerFiles } from './smaller-files';
 
 const year_seconds = 31_536_000;
-const hashed = /[-.][A-Z0-9]{8}\.(?:js|css|woff2|png|svg)$/;
+/** Eight letters and figures, in capitals or small ones by what made the file; a name of words and weights (sans-400) has none. */
+const hashed = /[-.][A-Za-z0-9]{8}\.(?:js|css|woff2|png|svg)$/;
 
 /** Clients have an application of their own, so that nothing of the workshop's travels with theirs. */
 function entryOf(folder: string, path: string): string {
