@@ -75,12 +75,12 @@ export class PriceSums {
     ];
     return [
       ...(discount_minor === 0 ? [] : discounted),
-      ...this.taxes(),
+      ...this.taxedSums(),
       this.worked('gross', $localize`Total`, gross_minor),
     ];
   });
 
-  private taxes(): Sum[] {
+  private taxedSums(): Sum[] {
     const { net_minor, taxes } = this.price();
     if (isOutsideTax(taxes.map(({ tax }) => tax))) return [];
     const each = taxes.map(({ taxCategoryId, tax, tax_minor }) => {
