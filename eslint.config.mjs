@@ -78,17 +78,6 @@ const specsRefused = [
 
 const restrictedSyntax = (refused) => ({ 'no-restricted-syntax': ['error', ...refused] });
 
-const projectOf = (files, ...projects) => ({
-  files,
-  languageOptions: { parserOptions: { project: projects, tsconfigRootDir: import.meta.dirname } },
-});
-
-const typed = [
-  projectOf(['backend/**/*.ts', 'shared/**/*.ts', 'seeders/**/*.ts', 'test/**/*.ts'], './backend/tsconfig.json'),
-  projectOf(['frontend/**/*.ts'], './frontend/tsconfig.spec.json'),
-  projectOf(['frontend/**/*-worker.ts'], './frontend/tsconfig.worker.json'),
-];
-
 const limits = {
   'max-lines': ['error', { max: 250 }],
   'max-lines-per-function': ['error', { max: 40 }],
@@ -113,9 +102,7 @@ const always = {
     'local/no-string-built-sql': 'error',
     'local/whole-minor-units': 'error',
     '@typescript-eslint/consistent-type-imports': 'error',
-    '@typescript-eslint/switch-exhaustiveness-check': ['error', { considerDefaultExhaustiveForUnions: true }],
     '@typescript-eslint/no-unused-vars': ['error', { ignoreRestSiblings: true }],
-    '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true }],
   },
 };
 
@@ -139,7 +126,6 @@ const page = {
     '@angular-eslint/prefer-on-push-component-change-detection': 'error',
     '@angular-eslint/prefer-signals': 'error',
     '@angular-eslint/prefer-output-readonly': 'error',
-    '@angular-eslint/no-uncalled-signals': 'error',
     '@angular-eslint/component-class-suffix': 'off',
     '@angular-eslint/directive-class-suffix': 'off',
     '@angular-eslint/component-selector': ['error', { type: 'element', prefix: 'app', style: 'kebab-case' }],
@@ -180,11 +166,7 @@ const inSpecs = {
     ...withoutLimits,
     ...restrictedSyntax(specsRefused),
     'local/tests-expect-something': 'error',
-    '@typescript-eslint/no-unsafe-assignment': 'off',
-    '@typescript-eslint/no-unsafe-member-access': 'off',
-    '@typescript-eslint/no-unsafe-argument': 'off',
     '@typescript-eslint/no-non-null-assertion': 'off',
-    '@typescript-eslint/unbound-method': 'off',
     'local/no-endless-subscription': 'off',
     'local/whole-minor-units': 'off',
   },
@@ -192,7 +174,6 @@ const inSpecs = {
 
 const scripts = {
   files: configuration,
-  extends: [tseslint.configs.disableTypeChecked],
   languageOptions: {
     globals: Object.fromEntries(
       ['process', 'console', 'URL', 'setTimeout', 'clearTimeout', 'fetch', 'Buffer'].map((name) => [name, 'readonly']),
@@ -214,8 +195,7 @@ export default defineConfig(
   globalIgnores(['dist/**', '.angular/**', '.cache/**', 'data/**', 'coverage/**', 'fonts/**', 'frontend/public/**']),
   { linterOptions: { reportUnusedDisableDirectives: 'error' } },
   { files: [...typescript, ...configuration], extends: [eslint.configs.recommended] },
-  { files: typescript, extends: [...tseslint.configs.recommendedTypeChecked] },
-  ...typed,
+  { files: typescript, extends: [...tseslint.configs.recommended] },
   always,
   sharedOnly,
   page,

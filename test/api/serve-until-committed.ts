@@ -14,7 +14,7 @@ const entries = process.argv.slice(2).map((setting): [string, string] => {
 const log = openLog('silent', { write: () => undefined });
 const app = openApp(openPlatform(readConfig(Object.fromEntries(entries)), systemClock, log));
 
-// eslint-disable-next-line @typescript-eslint/unbound-method -- it is called with its own `this` below
+// oxlint-disable-next-line typescript/unbound-method -- it is called with its own `this` below
 const end = ServerResponse.prototype.end;
 ServerResponse.prototype.end = function (this: ServerResponse, ...given: unknown[]) {
   if (this.req.method === 'GET' || this.statusCode >= 300) return end.apply(this, given as Parameters<typeof end>);

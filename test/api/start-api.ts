@@ -90,12 +90,14 @@ async function openParts(environment: Environment) {
     await standIn.stop();
     await catcher.stop();
     const { database } = platform;
-    const books = await Promise.all([ledgerFaults(database), contractFaults(app, database)]).finally(() =>
-      database.close(),
-    );
-    await rm(folder, { recursive: true, force: true });
-    const faults = [...books.flat(), ...faultsOfLog(logLines)];
-    if (faults.length > 0) throw new Error(`The books or the log of this run: ${faults.slice(0, 5).join('; ')}`);
+    try {
+      const books = [...(await ledgerFaults(database)), ...(await contractFaults(app, database))];
+      const faults = [...books, ...faultsOfLog(logLines)];
+      if (faults.length > 0) throw new Error(`The books or the log of this run: ${faults.slice(0, 5).join('; ')}`);
+    } finally {
+      await database.close();
+      await rm(folder, { recursive: true, force: true });
+    }
   };
   return { platform, clock, logLines, catcher, standIn, app, stop };
 }

@@ -21,7 +21,7 @@ function linesWith(files: readonly string[], pattern: RegExp): string[] {
 }
 
 const narrowed = /\b(it|test|describe)\s*\.\s*(only|skip|todo|failing)\b|\b(xit|xtest|xdescribe|fit|fdescribe)\s*\(/;
-const unexplained = /(eslint-disable|@ts-(ignore|nocheck|expect-error))(?!.*(--|: )\s*\S+\s+\S+)/;
+const unexplained = /((eslint|oxlint)-disable|@ts-(ignore|nocheck|expect-error))(?!.*(--|: )\s*\S+\s+\S+)/;
 const machinePath = /(^|[^.\w])\/(work|farm|root|tmp|home|Users)\/[a-z]/;
 const downloadAddress = /"resolved": "http/;
 const privateKey =

@@ -46,7 +46,11 @@ const firstVisit = (): Promise<Visit> =>
   withApi(
     async (api) => {
       const { address, stop } = await listen(api.app.web.express);
-      return visited(address).finally(stop);
+      try {
+        return await visited(address);
+      } finally {
+        await stop();
+      }
     },
     { WEB_DIR: builtPage },
   );

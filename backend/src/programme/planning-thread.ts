@@ -10,15 +10,19 @@ type Told = { readonly better: Programme } | { readonly plan: Programme };
 export class PlanningThread {
   private readonly stopped = new Int32Array(new SharedArrayBuffer(4));
 
-  plan(asked: Omit<PlanningQuestion, 'stop'>, onBetter: (plan: Programme) => void): Promise<Programme> {
+  async plan(asked: Omit<PlanningQuestion, 'stop'>, onBetter: (plan: Programme) => void): Promise<Programme> {
     const { file, options } = threadFile(join(__dirname, 'programme-worker.ts'));
     const stop = this.stopped.buffer;
     const thread = new Worker(file, { ...options, workerData: { ...asked, stop } satisfies PlanningQuestion });
-    return new Promise<Programme>((resolve, reject) => {
-      thread.on('message', (told: Told) => ('better' in told ? onBetter(told.better) : resolve(told.plan)));
-      thread.on('error', reject);
-      thread.on('exit', () => reject(new Error('the thread ended before it had planned')));
-    }).finally(() => thread.terminate());
+    try {
+      return await new Promise<Programme>((resolve, reject) => {
+        thread.on('message', (told: Told) => ('better' in told ? onBetter(told.better) : resolve(told.plan)));
+        thread.on('error', reject);
+        thread.on('exit', () => reject(new Error('the thread ended before it had planned')));
+      });
+    } finally {
+      await thread.terminate();
+    }
   }
 
   stop(): void {

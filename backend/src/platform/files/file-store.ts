@@ -41,7 +41,11 @@ async function writeThrough(path: string, bytes: Buffer): Promise<void> {
 
 async function syncFolder(path: string): Promise<void> {
   const folder = await open(path, 'r');
-  await folder.sync().finally(() => folder.close());
+  try {
+    await folder.sync();
+  } finally {
+    await folder.close();
+  }
 }
 
 const names = (folder: string): Promise<string[]> => readdir(folder).catch(() => []);

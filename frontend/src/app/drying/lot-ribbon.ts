@@ -48,7 +48,7 @@ function laggedWindows(done: Done, all: readonly Done[]): (Stretch & { label: st
   const portion = all.filter(({ task }) => task.portion === done.task.portion);
   return done.step.lags.flatMap(({ toStepId, finishedWithin_minutes }) => {
     const at = portion.findIndex(({ step }) => step.stepId === toStepId);
-    const before = portion[at - 1];
+    const before = at > 0 ? portion.at(at - 1) : undefined;
     if (finishedWithin_minutes === null || !before) return [];
     const from_minutes = before.task.end_minutes + before.step.opens_minutes;
     const to_minutes = done.task.start_minutes + finishedWithin_minutes;

@@ -175,7 +175,7 @@ export class EstimateStore {
   /** Hears at once how things stand, without waiting for the next turn of `Presence`; a server that is away tells nothing. */
   async lookAgain(): Promise<void> {
     const id = this.known()?.id;
-    const answer = id && (await this.presence.once(id));
+    const answer = id ? await this.presence.once(id) : undefined;
     if (answer) this.hear(answer);
   }
 
@@ -199,7 +199,7 @@ export class EstimateStore {
   /** An answer overtaken on its way by what was kept meanwhile would put old entries back: it is asked for again. */
   private async read(): Promise<void> {
     const estimateId = this.opened()?.estimateId;
-    const read = estimateId && (await this.client.read(estimateId));
+    const read = estimateId ? await this.client.read(estimateId) : undefined;
     if (read && this.isOvertaken(read)) await this.read();
     else if (read) this.take(read);
   }

@@ -121,8 +121,8 @@ export class ClientField extends ValueEntry<string | null> {
 
   protected leave(): void {
     const written = inSmall(this.typed().trim());
-    const meant = this.isSearching() && this.offered().find(({ name }) => inSmall(name) === written);
-    if (meant) this.choose(meant);
+    const meant = this.offered().find(({ name }) => inSmall(name) === written);
+    if (this.isSearching() && meant) this.choose(meant);
     this.wasLeft.set(true);
     this.visit();
   }

@@ -16,8 +16,9 @@ export class RowSteps {
 
   protected step(event: Event, by: 1 | -1): void {
     const links = this.links();
-    const next = links[links.indexOf(event.target as HTMLElement) + by];
-    if (!links.includes(event.target as HTMLElement) || !next) return;
+    const at = links.indexOf(event.target as HTMLElement);
+    const next = at + by < 0 ? undefined : links.at(at + by);
+    if (at < 0 || !next) return;
     event.preventDefault();
     next.focus();
   }

@@ -28,7 +28,7 @@ const rowsOf = ({ height_mm, pieceHeight_mm, lap_mm }: LayPlanBand): number =>
 function shownPieces(bands: readonly LayPlanBand[]): number {
   const rows = bands.reduce((sum, band) => sum + rowsOf(band), 0);
   const height_mm = bands.reduce((sum, band) => sum + band.height_mm, 0);
-  const [widest] = [...bands].sort((one, other) => other.length_mm - one.length_mm);
+  const widest = [...bands].sort((one, other) => other.length_mm - one.length_mm).at(0);
   if (!widest) return 0;
   const pitch_mm = widest.pieceLength_mm - widest.lap_mm;
   const along = Math.max(fewestAlong, Math.floor((slender * height_mm) / pitch_mm));

@@ -73,14 +73,17 @@ export class LayPlanDrawing {
   });
   protected readonly view = computed(() => {
     const { plan, view } = this.drawn();
-    const [along, ...others] = view.dimensions;
+    const along = view.dimensions.at(0);
     if (plan.shownLength_mm >= plan.length_mm - 1e-6 || !along) return view;
     const [shown, whole] = [plan.shownLength_mm, plan.length_mm].map((length_mm) =>
       this.formats.roughLength(length_mm),
     );
     return {
       ...view,
-      dimensions: [{ ...along, words: $localize`${shown}:shown: shown of ${whole}:length:` }, ...others],
+      dimensions: [
+        { ...along, words: $localize`${shown}:shown: shown of ${whole}:length:` },
+        ...view.dimensions.slice(1),
+      ],
     };
   });
 

@@ -19,7 +19,7 @@ export class AnsweringForSpecs {
   readonly asked: { readonly name: string; readonly parts: AskedParts }[] = [];
   readonly provider: Provider = { provide: Api, useValue: { call: this.call.bind(this) } };
 
-  constructor(private readonly answers: Readonly<Record<string, Answer>>) {}
+  constructor(private readonly answers: Readonly<Record<string, Answer | undefined>>) {}
 
   of(name: string): AskedParts[] {
     return this.asked.filter((one) => one.name === name).map(({ parts }) => parts);

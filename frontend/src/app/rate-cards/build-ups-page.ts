@@ -52,7 +52,7 @@ export class BuildUpsPage {
   protected readonly chosenId = signal<string | undefined>(undefined);
   protected readonly chosen = computed(() => {
     const buildUps = this.buildUps();
-    return buildUps.find(({ id }) => id === this.chosenId()) ?? buildUps[0];
+    return buildUps.find(({ id }) => id === this.chosenId()) ?? buildUps.at(0);
   });
   private readonly at = computed(() => this.buildUps().findIndex(({ id }) => id === this.chosen()?.id));
   protected readonly path = computed<CellPath>(() => [...place, this.at()]);

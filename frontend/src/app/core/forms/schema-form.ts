@@ -101,7 +101,7 @@ export class SchemaForm<S extends z.ZodObject> {
   refuse(error: unknown): void {
     if (!(error instanceof ProblemError)) throw error;
     const remarks = error.problem.errors.map(({ path, message }) => ({ path: path.join('.'), text: message }));
-    const placed = remarks.filter(({ path }) => path !== '' && this.nearest(path));
+    const placed = remarks.filter(({ path }) => path !== '' && this.nearest(path) !== undefined);
     this.refusals = placed.map((remark) => {
       const control = this.nearest(remark.path) as AbstractControl;
       return { ...remark, control, entry: written(control) };

@@ -32,7 +32,7 @@ export class OrnamentCells {
   }
 
   private typeName(form: MemberForm, { path, text, catalogue, run_mm }: OrnamentCell): string {
-    const [entry] = foundEntries(catalogue, text);
+    const entry = foundEntries(catalogue, text).at(0);
     if (!entry || text.trim() === '') return $localize`The rate card has no such ornament.`;
     const extent = form.value<OrnamentExtent>(`${path}.extent`);
     if (extent) form.put(`${path}.extent`, fittingExtent(extent, entry.way, run_mm));

@@ -86,7 +86,7 @@ function isHeading(cells: readonly string[], headings: readonly string[]): boole
 /** Rows of a spreadsheet as members of one shape: name, count, then its lengths, each as it was typed. A first row of headings is left out. */
 export function pastedMembers(lines: readonly (readonly string[])[], pasting: Pasting): PastedMember[] {
   const filled = lines.filter((cells) => cells.some((cell) => cell !== ''));
-  const [first] = filled;
+  const first = filled.at(0);
   const rows = first && isHeading(first, pasting.headings) ? filled.slice(1) : filled;
   return rows.map((cells, index) => {
     const start = { ...pasting.start, place: pasting.start.place + index * step };

@@ -46,7 +46,7 @@ export class CalendarFeeds {
 
   constructor() {
     effect(() => {
-      const [first] = this.everybody();
+      const first = this.everybody().at(0);
       if (!this.isOfOffice && first) this.form.reset({ name: first.name, personId: first.id });
     });
   }

@@ -115,8 +115,9 @@ export class ProgrammeStore {
     error: unknown,
     { estimateId, base, mine }: { estimateId: string; base: ProgrammeInputs; mine: ProgrammeInputs },
   ): Promise<ProgrammeAnswer> {
-    const stands = error instanceof ProblemError && error.isStale && standing.safeParse(error.problem.current);
-    if (!stands || !stands.success) throw error;
+    if (!(error instanceof ProblemError && error.isStale)) throw error;
+    const stands = standing.safeParse(error.problem.current);
+    if (!stands.success) throw error;
     const { version, inputs: theirs } = stands.data;
     const { value, overlaps } = mergedValues<ProgrammeInputs>({ base, mine, theirs }, () => 'mine');
     if (overlaps.length > 0) throw error;

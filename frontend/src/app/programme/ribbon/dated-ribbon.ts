@@ -95,8 +95,8 @@ export class DatedRibbon implements RibbonListener {
     const shown = this.rows().flatMap(({ lot, tasks }) =>
       tasks.map(({ task }) => ({ lotId: lot.id, taskId: task.id })),
     );
-    const of = (id: string | undefined) => id && shown.find(({ taskId }) => taskId === id);
-    return of(this.asked()) || of(this.chosen()) || shown.at(0);
+    const of = (id: string | undefined) => shown.find(({ taskId }) => taskId === id);
+    return of(this.asked()) ?? of(this.chosen()) ?? shown.at(0);
   });
   protected readonly ghost = computed(() => {
     const at = this.pointer.dragged();

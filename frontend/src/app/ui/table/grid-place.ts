@@ -13,7 +13,7 @@ const pageRows = 10;
 
 type Move = (place: GridPlace, size: GridSize) => GridPlace;
 
-const moves: Readonly<Record<string, Move>> = {
+const moves: Readonly<Record<string, Move | undefined>> = {
   ArrowUp: ({ row, column }) => ({ row: row - 1, column }),
   ArrowDown: ({ row, column }) => ({ row: row + 1, column }),
   ArrowLeft: ({ row, column }) => ({ row, column: column - 1 }),
