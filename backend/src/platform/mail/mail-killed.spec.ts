@@ -15,7 +15,7 @@ import { openLog } from '../log/log';
 import { Tasks } from '../tasks/tasks';
 import { Mailbox } from './mailbox';
 
-const [letters, kills] = [300, 20];
+const [letters, kills, workers] = [300, 20, 8];
 const received: { id: string; subject: string }[] = [];
 
 /** A mail server that takes its time, so that workers are killed in the middle of a mail. */
@@ -84,8 +84,8 @@ test('of 300 mails whose workers are killed 20 times none is lost, and what came
   expect(await waiting()).toBeGreaterThan(0);
   mailbox.connect(smtpUrl, false);
   for (let round = 0; round < 60 && (await waiting()) > 0; round++) {
-    await tasks.runDue();
-    await pause(200);
+    await Promise.all(Array.from({ length: workers }, () => tasks.runDue()));
+    await pause(50);
   }
   expect(new Set(received.map(({ subject }) => subject)).size).toBe(letters);
   expect(new Set(received.map(({ id, subject }) => `${id} ${subject}`)).size).toBe(letters);
