@@ -41,6 +41,9 @@ function phrase() {
   return `${chosen.join(' ')} ${randomInt(1_000, 10_000)}`;
 }
 
+/** Whether the start before was killed: whoever ends in order takes the lock away. */
+export const wasKilled = (folder) => existsSync(join(folder, 'start.pid'));
+
 /** A folder that one start at a time may use. Throws an error whose message says who uses it already. */
 export function lockFolder(folder, port) {
   const file = join(folder, 'start.pid');

@@ -3,7 +3,7 @@ import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { buildWhatChanged, watchPages } from './build.mjs';
 import { watchServer } from './build-server.mjs';
-import { lockFolder, secretsOf } from './data-folder.mjs';
+import { lockFolder, secretsOf, wasKilled } from './data-folder.mjs';
 import { isFree } from './free-port.mjs';
 import { startOwnDatabase } from './own-database.mjs';
 import { startServer } from './server-process.mjs';
@@ -12,6 +12,10 @@ const root = join(dirname(fileURLToPath(import.meta.url)), '../..');
 const [watches, seedsOnly] = ['--watch', '--seed'].map((flag) => process.argv.includes(flag));
 const port = Number(process.env.PORT ?? 8080);
 const dataFolder = process.env.DATA_DIR ?? join(root, 'data');
+
+/** As long as the server of a start that was killed takes to end by itself. */
+const longestEnding_milliseconds = 10_000;
+
 const say = (text) => console.log(text);
 
 /** What was started, in the order to be stopped in. */
@@ -31,8 +35,9 @@ async function prepare() {
     throw new Error(`PORT must be a number from 1 to 65535, not ${process.env.PORT}.`);
   if (seedsOnly && process.env.DATABASE_URL)
     throw new Error('The demonstration is only put into a database of our own, never into a DATABASE_URL.');
+  const wait_milliseconds = wasKilled(dataFolder) ? longestEnding_milliseconds : 0;
   toStop.push(lockFolder(dataFolder, port));
-  if (!seedsOnly && !(await isFree(port)))
+  if (!seedsOnly && !(await isFree(port, wait_milliseconds)))
     throw new Error(`Port ${port} is taken by another program. Choose another one: PORT=${port + 1} npm start`);
   await buildWhatChanged(say, { withPages: !seedsOnly });
 }

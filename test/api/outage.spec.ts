@@ -3,10 +3,12 @@ import type { AddressInfo } from 'node:net';
 import { setTimeout as pause } from 'node:timers/promises';
 import { invite, listInvitations, listPeople } from '#shared/accounts/people-endpoints';
 import { askForReset } from '#shared/accounts/password-endpoints';
+import { readSession } from '#shared/accounts/session-endpoints';
 import { changeWorkshop, readWorkshop } from '#shared/accounts/workshop-endpoints';
 import { randomUUID } from 'node:crypto';
 import { stopListening } from '../../backend/src/platform/listen';
 import { startApi, type Api } from './start-api';
+import { Visitor } from './visitor';
 import { foundingSettings } from './test-workshop';
 
 /** What fails around us fails closed, says so blandly, and leaves no half step (ASVS 2.3.3, 16.5.1 to 16.5.3). */
@@ -96,8 +98,9 @@ test('while the database does not answer, requests are told to come back, and th
   const down = await api.as('owner').call(listPeople);
   const ready = await api.as('owner').request('get', '/readyz');
   const alive = await api.as('owner').request('get', '/healthz');
+  const begun = await new Visitor(api.app.web.express).call(readSession);
   manager.getConnection = getConnection;
-  expect([down.status, ready.status, alive.status]).toEqual([503, 503, 200]);
+  expect([down.status, ready.status, alive.status, begun.status]).toEqual([503, 503, 200, 503]);
   expect(Number(down.headers['retry-after'])).toBeGreaterThan(0);
   expect((await api.as('owner').call(listPeople)).status).toBe(200);
 });

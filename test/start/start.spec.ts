@@ -150,7 +150,6 @@ describe('the first start', () => {
   test('that is killed leaves nothing the next one cannot put right', async () => {
     first.child.kill('SIGKILL');
     await first.ended;
-    for (let wait = 0; wait < 100 && (await status('/healthz')) !== 0; wait++) await pause(100);
     const next = start();
     await untilReady(next);
     expect(await status('/readyz')).toBe(200);

@@ -22,6 +22,7 @@ interface Parts {
 
 export const sessionRoutes = ({ identities, sessions, clock }: Parts): Route[] => [
   mount(readSession, async ({ person, actor, session }) => {
+    await session.keep();
     const identity = person && { accountId: person.accountId, ...(actor ? { membershipId: actor.membershipId } : {}) };
     return presentSession(session.forgeryToken, identity && (await identities.facts(identity)));
   }),

@@ -107,6 +107,7 @@ export class Sessions {
         beginSession(request);
         return request.session.forgeryToken ?? '';
       },
+      keep: () => this.keep(request),
       signIn,
       enter: (identity) => this.enter(request, identity),
       beginVisit: (visit) => this.beginVisit(request, visit),
@@ -154,7 +155,12 @@ export class Sessions {
       request.session.regenerate((error) => (error ? reject(error as Error) : resolve()));
     });
     Object.assign(request.session, { visit, ...(passport?.user ? { passport, forgeryToken, handle, begunAt } : {}) });
+    await this.keep(request);
+  }
+
+  private async keep(request: Request): Promise<void> {
     beginSession(request);
+    if (request.session.seenAt !== undefined) return;
     await new Promise<void>((resolve, reject) => {
       request.session.save((error: Error | undefined) => (error ? reject(error) : resolve()));
     });

@@ -54,6 +54,8 @@ export interface SessionControl {
   readonly id: string | undefined;
   /** The token that unsafe requests of this session carry. */
   readonly forgeryToken: string;
+  /** Writes a session that has just begun, so that nobody is given a token of one that is not kept. */
+  keep(): Promise<void>;
   /** Checks e-mail and password, read by their schema, and signs in under a new session id; answers nobody when they do not fit. */
   signInByPassword(entered: Credentials): Promise<Identity | undefined>;
   /** Signs in under a new session id; its time begins anew. */
