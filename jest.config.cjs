@@ -15,6 +15,8 @@ const modules = '(@asamuzakjp|@csstools|@exodus|entities|icosphere|parse5|pdfjs-
 
 const node = (name) => ({
   displayName: name,
+  /** One for all of them, so that a module is transformed once and not once for each kind of test. */
+  id: 'node',
   rootDir: __dirname,
   testEnvironment: '<rootDir>/test/environment/node-environment.cjs',
   testMatch: [`<rootDir>/${name}/**/*.spec.ts`],

@@ -13,7 +13,10 @@ const minute_milliseconds = 60_000;
 /** A busy machine makes a test slow, not wrong. */
 const testLimit_milliseconds = 60_000;
 
-/** They open the built application, so they come after everything else; three at a time, since a browser waits for a third of its time. */
+/** Three at a time on two cores: each waits a third of its time for its database, its threads or its browser. */
+const threeAtATime = '--maxWorkers=3';
+
+/** They open the built application, so they come after everything else. */
 const onTheBuiltApplication = ['test/start', 'test/journeys'];
 
 const say = (text) => console.log(`\n— ${text}`);
@@ -67,6 +70,7 @@ async function jest(name, args, limit_minutes) {
     '--json',
     `--outputFile=${report}`,
     `--testTimeout=${testLimit_milliseconds}`,
+    threeAtATime,
   ];
   const code = await run([process.execPath, 'node_modules/jest/bin/jest.js', ...reporting, ...args], limit_minutes);
   return countsOf(report, code);
@@ -82,8 +86,7 @@ async function runAll() {
   const checks = ['check:types', 'check:lint', 'check:layers'].map(check);
   const results = [await check('build')];
   results.push(await jest('specifications', later.length > 0 ? ['--ignoreProjects', ...later] : [], 20));
-  if (later.length > 0)
-    results.push(await jest('the built application', ['--maxWorkers=3', '--selectProjects', ...later], 20));
+  if (later.length > 0) results.push(await jest('the built application', ['--selectProjects', ...later], 20));
   return [...results, ...(await Promise.all(checks))];
 }
 
