@@ -41,10 +41,10 @@ function phrase() {
   return `${chosen.join(' ')} ${randomInt(1_000, 10_000)}`;
 }
 
-/** Whether the start before was killed: whoever ends in order takes the lock away. */
-export const wasKilled = (folder) => existsSync(join(folder, 'start.pid'));
-
-/** A folder that one start at a time may use. Throws an error whose message says who uses it already. */
+/**
+ * A folder that one start at a time may use. Answers how to leave it, and whether the start before was killed: whoever ends in order takes
+ * the lock away. Throws an error whose message says who uses it already.
+ */
 export function lockFolder(folder, port) {
   const file = join(folder, 'start.pid');
   mkdirSync(folder, { recursive: true, mode: 0o700 });
@@ -54,6 +54,7 @@ export function lockFolder(folder, port) {
     closeSync(handle);
     writeFileSync(join(folder, 'start.port'), String(port));
   };
+  let wasKilled = false;
   try {
     claim();
   } catch {
@@ -65,8 +66,9 @@ export function lockFolder(folder, port) {
       throw new Error(`Bolewright is already running here (process ${pid})${at}. End that one first, or use it.`);
     rmSync(file, { force: true });
     claim();
+    wasKilled = true;
   }
-  return () => rmSync(file, { force: true });
+  return { leave: () => rmSync(file, { force: true }), wasKilled };
 }
 
 function readSecrets(file) {

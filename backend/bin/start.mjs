@@ -3,7 +3,7 @@ import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { buildWhatChanged, watchPages } from './build.mjs';
 import { watchServer } from './build-server.mjs';
-import { lockFolder, secretsOf, wasKilled } from './data-folder.mjs';
+import { lockFolder, secretsOf } from './data-folder.mjs';
 import { isFree } from './free-port.mjs';
 import { startOwnDatabase } from './own-database.mjs';
 import { startServer } from './server-process.mjs';
@@ -12,10 +12,7 @@ const root = join(dirname(fileURLToPath(import.meta.url)), '../..');
 const [watches, seedsOnly] = ['--watch', '--seed'].map((flag) => process.argv.includes(flag));
 const port = Number(process.env.PORT ?? 8080);
 const dataFolder = process.env.DATA_DIR ?? join(root, 'data');
-
-/** As long as the server of a start that was killed takes to end by itself. */
 const longestEnding_milliseconds = 10_000;
-
 const say = (text) => console.log(text);
 
 /** What was started, in the order to be stopped in. */
@@ -30,14 +27,20 @@ function stopAll(code) {
   return stopping;
 }
 
+/** The server of a start that was killed still has the port, and ends by itself. */
+function isFreeSoon() {
+  say('Waiting until the server of the start before has ended …');
+  return isFree(port, longestEnding_milliseconds);
+}
+
 async function prepare() {
   if (!Number.isInteger(port) || port < 1 || port > 65_535)
     throw new Error(`PORT must be a number from 1 to 65535, not ${process.env.PORT}.`);
   if (seedsOnly && process.env.DATABASE_URL)
     throw new Error('The demonstration is only put into a database of our own, never into a DATABASE_URL.');
-  const wait_milliseconds = wasKilled(dataFolder) ? longestEnding_milliseconds : 0;
-  toStop.push(lockFolder(dataFolder, port));
-  if (!seedsOnly && !(await isFree(port, wait_milliseconds)))
+  const { leave, wasKilled } = lockFolder(dataFolder, port);
+  toStop.push(leave);
+  if (!seedsOnly && !(await isFree(port)) && !(wasKilled && (await isFreeSoon())))
     throw new Error(`Port ${port} is taken by another program. Choose another one: PORT=${port + 1} npm start`);
   await buildWhatChanged(say, { withPages: !seedsOnly });
 }

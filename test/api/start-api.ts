@@ -91,8 +91,8 @@ async function openParts(environment: Environment) {
     await catcher.stop();
     const { database } = platform;
     try {
-      const books = [...(await ledgerFaults(database)), ...(await contractFaults(app, database))];
-      const faults = [...books, ...faultsOfLog(logLines)];
+      const books = await Promise.all([ledgerFaults(database), contractFaults(app, database)]);
+      const faults = [...books.flat(), ...faultsOfLog(logLines)];
       if (faults.length > 0) throw new Error(`The books or the log of this run: ${faults.slice(0, 5).join('; ')}`);
     } finally {
       await database.close();

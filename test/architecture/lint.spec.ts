@@ -287,7 +287,6 @@ const copied = [
   'tsconfig.json',
   'backend/tsconfig.json',
   'shared/tsconfig.json',
-  'frontend/tsconfig.app.json',
   'frontend/tsconfig.spec.json',
   'frontend/tsconfig.worker.json',
   'test/architecture/lint-rules',
