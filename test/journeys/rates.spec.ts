@@ -35,8 +35,7 @@ it('changes a rate, reads its effect and puts it in force', async () => {
   await see('journey rates changes');
   expect(await page.locator('main').innerText()).toMatch(/Herons estimate/);
   await page.getByRole('button', { name: 'Put in force from today' }).click();
-  const sure = page.getByRole('dialog').getByRole('button').last();
-  if (await sure.isVisible().catch(() => false)) await sure.click();
+  await page.getByRole('dialog').getByRole('button', { name: 'Put in force', exact: true }).click();
   await expectSoon(
     async () => (await walk.api.app.rateCards.service.inForce(walk.api.ours.id)).name !== 'House values to start from',
   );
